@@ -1,0 +1,45 @@
+package org.seepledger.aquifer;
+
+/**
+ * One quantity on the grid, a value per cell, layer and step; a step is an interval, an instant, or, for what does not
+ * change, always 0.
+ */
+public interface GriddedValues {
+
+    /**
+     * Reads one block. Called from any thread.
+     *
+     * @param layer the layer, from 0
+     * @param step the interval or instant, from 0
+     * @param window the block
+     * @param target receives {@code window.size()} values, row-major, row 0 northernmost, in the set's units;
+     *     {@code NaN} where there is no value
+     * @param offset where in {@code target} the first goes
+     * @throws org.seepledger.fault.DataFault if the file cannot be read or does not hold what it should
+     */
+    void read(int layer, int step, Window window, double[] target, int offset);
+
+    /**
+     * {@return whether the values may differ from step to step; one raster for all steps does not}
+     */
+    boolean changes();
+
+    /**
+     * {@return a quantity with one value everywhere}
+     *
+     * @param value the value, in the set's units
+     */
+    static GriddedValues constant(double value) {
+        return new GriddedValues() {
+            @Override
+            public void read(int layer, int step, Window window, double[] target, int offset) {
+                java.util.Arrays.fill(target, offset, offset + window.size(), value);
+            }
+
+            @Override
+            public boolean changes() {
+                return false;
+            }
+        };
+    }
+}

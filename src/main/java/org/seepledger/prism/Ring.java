@@ -1,0 +1,27 @@
+package org.seepledger.prism;
+
+import java.util.List;
+
+/**
+ * A closed ring of sides: counter-clockwise where it is an outer ring, clockwise where it is an island.
+ *
+ * @param part the number of the part it belongs to, from 1
+ * @param island the number of the island in its part, from 1; 0 for an outer ring
+ * @param sides at least three, each ending where the next begins, the last where the first does
+ */
+public record Ring(int part, int island, List<Side> sides) {
+
+    /** Copies the list. */
+    public Ring {
+        sides = List.copyOf(sides);
+    }
+
+    /**
+     * {@return the side after a side}
+     *
+     * @param index a side, from 0
+     */
+    public Side after(int index) {
+        return sides.get((index + 1) % sides.size());
+    }
+}
