@@ -1,10 +1,15 @@
 package org.seepledger.aquifer;
 
+import java.util.Arrays;
+
 /**
  * The edges of the columns or rows along one axis, kept as distances from the first edge so that a large coordinate
  * costs no digits.
  */
 public final class Axis {
+
+    /** How near an edge, in cells, a place is taken to lie on it. */
+    public static final double SNAP = 1e-9;
 
     private final double origin;
     private final double[] edges;
@@ -105,8 +110,23 @@ public final class Axis {
      * @param distance in plan units
      */
     public int cellAt(double distance) {
-        int found = java.util.Arrays.binarySearch(edges, distance);
+        int found = Arrays.binarySearch(edges, distance);
         int cell = found >= 0 ? found : -found - 2;
         return cell == count() && distance == edges[count()] ? count() - 1 : cell;
+    }
+
+    /**
+     * {@return a place, put on an edge where it lies within {@value #SNAP} of a cell of one}
+     *
+     * @param distance from the first edge, in plan units
+     */
+    public double snapped(double distance) {
+        int cell = Math.max(0, Math.min(count() - 1, cellAt(distance)));
+        for (int line = cell; line <= cell + 1; line++) {
+            if (Math.abs(distance - edges[line]) <= SNAP * size(cell)) {
+                return edges[line];
+            }
+        }
+        return distance;
     }
 }

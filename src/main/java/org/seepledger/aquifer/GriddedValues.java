@@ -1,5 +1,7 @@
 package org.seepledger.aquifer;
 
+import java.util.Arrays;
+
 /**
  * One quantity on the grid, a value per cell, layer and step; a step is an interval, an instant, or, for what does not
  * change, always 0.
@@ -25,6 +27,20 @@ public interface GriddedValues {
     boolean changes();
 
     /**
+     * {@return whether values belong to layers; where not, a source's enter the uppermost active cell}
+     */
+    boolean layered();
+
+    /**
+     * {@return the mean of the two instants that bound each interval: snapshots read as intervals}
+     *
+     * @param snapshots values at instants
+     */
+    static GriddedValues meanOfEnds(GriddedValues snapshots) {
+        return snapshots.changes() ? new MeanOfEnds(snapshots) : snapshots;
+    }
+
+    /**
      * {@return a quantity with one value everywhere}
      *
      * @param value the value, in the set's units
@@ -33,11 +49,16 @@ public interface GriddedValues {
         return new GriddedValues() {
             @Override
             public void read(int layer, int step, Window window, double[] target, int offset) {
-                java.util.Arrays.fill(target, offset, offset + window.size(), value);
+                Arrays.fill(target, offset, offset + window.size(), value);
             }
 
             @Override
             public boolean changes() {
+                return false;
+            }
+
+            @Override
+            public boolean layered() {
                 return false;
             }
         };

@@ -1,0 +1,158 @@
+package org.seepledger.aquifer;
+
+import java.util.List;
+import org.seepledger.fault.DataFault;
+
+/**
+ * Tops, bottoms and thicknesses of a block of cells.
+ *
+ * <p>A cell without thickness is <i>pinched out</i>: what lies above and below it are neighbours. Surfaces that cross
+ * or part by no more than a millionth of their elevation count as touching.
+ */
+public final class CellGeometry {
+
+    private static final double TOUCHING = 1e-6;
+
+    private final Grid grid;
+    private final Window inner;
+    private final Block block;
+    private final double[] top;
+    private final double[] bottom;
+
+    private CellGeometry(Grid grid, Window inner, Block block, double[] top, double[] bottom) {
+        this.grid = grid;
+        this.inner = inner;
+        this.block = block;
+        this.top = top;
+        this.bottom = bottom;
+    }
+
+    /**
+     * Reads the surfaces of a window and of a ring of one cell around it.
+     *
+     * @param grid the grid
+     * @param layers the layers from the top down
+     * @param inner the window
+     * @return the cells of all layers
+     * @throws DataFault if surfaces cross or layers do not touch
+     */
+    public static CellGeometry of(Grid grid, List<Layer> layers, Window inner) {
+        Window window = inner.widened(1, grid);
+        Block block = new Block(window, layers.size());
+        double[] top = new double[block.size()];
+        double[] bottom = new double[block.size()];
+        int size = window.size();
+        for (int k = 0; k < layers.size(); k++) {
+            Layer layer = layers.get(k);
+            if (k > 0) {
+                System.arraycopy(bottom, (k - 1) * size, top, k * size, size);
+            }
+            if (layer.top().isPresent()) {
+                layer.top().get().read(k, 0, window, top, k * size);
+            }
+            layer.bottom().read(k, 0, window, bottom, k * size);
+        }
+        CellGeometry geometry = new CellGeometry(grid, inner, block, top, bottom);
+        geometry.check();
+        return geometry;
+    }
+
+    private void check() {
+        int size = block.window().size();
+        for (int i = 0; i < top.length; i++) {
+            if (top[i] - bottom[i] < -tolerance(i)) {
+                throw new DataFault(
+                        "layer " + (i / size + 1),
+                        place(i),
+                        "a top of " + top[i] + " below a bottom of " + bottom[i],
+                        "surfaces that do not cross",
+                        "Correct one of the two surfaces there.");
+            }
+            if (i >= size && Math.abs(top[i] - bottom[i - size]) > tolerance(i)) {
+                throw new DataFault(
+                        "layer " + (i / size + 1),
+                        place(i),
+                        "a top of " + top[i] + " under a layer that ends at " + bottom[i - size],
+                        "layers that touch",
+                        "Leave the layer's top out, or make the two surfaces the same.");
+            }
+        }
+    }
+
+    private double tolerance(int cell) {
+        return TOUCHING * Math.max(1, Math.max(Math.abs(top[cell]), Math.abs(bottom[cell])));
+    }
+
+    private String place(int cell) {
+        int inLayer = cell % block.window().size();
+        int row = block.window().row() + inLayer / block.window().columns();
+        int column = block.window().column() + inLayer % block.window().columns();
+        return "row " + (row + 1) + ", column " + (column + 1);
+    }
+
+    /**
+     * {@return the grid}
+     */
+    public Grid grid() {
+        return grid;
+    }
+
+    /**
+     * {@return the window that was asked for, without the ring}
+     */
+    public Window inner() {
+        return inner;
+    }
+
+    /**
+     * {@return the block of cells, the ring among them}
+     */
+    public Block block() {
+        return block;
+    }
+
+    /**
+     * {@return a cell's top, in length units; NaN where a surface has no value}
+     *
+     * @param cell its place in the block
+     */
+    public double top(int cell) {
+        return top[cell];
+    }
+
+    /**
+     * {@return a cell's bottom, in length units; NaN where a surface has no value}
+     *
+     * @param cell its place in the block
+     */
+    public double bottom(int cell) {
+        return bottom[cell];
+    }
+
+    /**
+     * {@return a cell's thickness, in length units; NaN where a surface has no value}
+     *
+     * @param cell its place in the block
+     */
+    public double thickness(int cell) {
+        return top[cell] - bottom[cell];
+    }
+
+    /**
+     * {@return whether a cell has both surfaces and lies open between them}
+     *
+     * @param cell its place in the block
+     */
+    public boolean isPresent(int cell) {
+        return thickness(cell) > 0;
+    }
+
+    /**
+     * {@return whether a cell has both surfaces and no thickness}
+     *
+     * @param cell its place in the block
+     */
+    public boolean isPinchedOut(int cell) {
+        return thickness(cell) <= 0;
+    }
+}

@@ -1,0 +1,92 @@
+package org.seepledger.aquifer;
+
+import java.util.ArrayList;
+import java.util.List;
+
+/** Works out sources by area and by cell, and releases from storage, of one interval. */
+final class CellTerms {
+
+    private final Aquifer aquifer;
+    private final int interval;
+    private final CellGeometry geometry;
+    private final Block block;
+    private final boolean[] active;
+
+    CellTerms(Aquifer aquifer, int interval, CellGeometry geometry, boolean[] active) {
+        this.aquifer = aquifer;
+        this.interval = interval;
+        this.geometry = geometry;
+        this.block = geometry.block();
+        this.active = active;
+    }
+
+    List<CellTerm> sources() {
+        List<CellTerm> terms = new ArrayList<>();
+        for (Source source : aquifer.sources()) {
+            if (source instanceof Source.Areal areal) {
+                terms.add(term(false, areal.category(), areal.rate(), true));
+            } else if (source instanceof Source.Cells cells) {
+                terms.add(term(false, cells.category(), cells.rate(), false));
+            }
+        }
+        return terms;
+    }
+
+    List<CellTerm> suppliedStorage() {
+        return aquifer.storage().supplied().stream()
+                .map(supplied -> term(true, supplied.item(), supplied.rate(), false))
+                .toList();
+    }
+
+    List<CellTerm> storageFromHeads() {
+        GriddedValues head = aquifer.head().orElseThrow();
+        double[] start = block.read(head, interval);
+        double[] end = block.read(head, interval + 1);
+        StorageRelease release = new StorageRelease(
+                geometry, aquifer.layers(), start, end, aquifer.times().length(interval));
+        List<CellTerm> terms = new ArrayList<>();
+        aquifer.storage()
+                .specificYield()
+                .ifPresent(yield -> terms.add(
+                        new CellTerm(true, Aquifer.WATER_TABLE_STORAGE, release.waterTable(yield, active), 0, 0)));
+        terms.add(new CellTerm(true, Aquifer.ELASTIC_STORAGE, release.elastic(aquifer.storage(), active), 0, 0));
+        return terms;
+    }
+
+    private CellTerm term(boolean storage, String item, GriddedValues values, boolean perArea) {
+        double[] rates = new double[block.size()];
+        int missing = 0;
+        double lost = 0;
+        Window window = block.window();
+        double[] given = new double[window.size()];
+        int layers = values.layered() ? block.layers() : 1;
+        for (int layer = 0; layer < layers; layer++) {
+            values.read(layer, interval, window, given, 0);
+            for (int i = 0; i < given.length; i++) {
+                int row = window.row() + i / window.columns();
+                int column = window.column() + i % window.columns();
+                int cell = values.layered() ? block.cell(layer, row, column) : uppermost(row, column);
+                boolean counted = geometry.inner().contains(row, column);
+                double rate = perArea ? given[i] * geometry.grid().area(row, column) : given[i];
+                if (cell >= 0 && active[cell] && !Double.isNaN(rate)) {
+                    rates[cell] = rate;
+                } else if (counted && Double.isNaN(rate)) {
+                    missing++;
+                } else if (counted) {
+                    lost += Math.abs(rate);
+                }
+            }
+        }
+        return new CellTerm(storage, item, rates, missing, lost);
+    }
+
+    private int uppermost(int row, int column) {
+        for (int layer = 0; layer < block.layers(); layer++) {
+            int cell = block.cell(layer, row, column);
+            if (active[cell]) {
+                return cell;
+            }
+        }
+        return -1;
+    }
+}

@@ -1,0 +1,20 @@
+package org.seepledger.aquifer;
+
+/** What was given of flow, from which flows through cell faces follow. */
+public sealed interface Flow permits DarcyFlux, GivenFaceFlow {
+
+    /**
+     * Works out the face flows of one interval.
+     *
+     * @param interval the interval, from 0
+     * @param geometry a block of cells with a ring of one cell around those whose faces are wanted
+     * @param saturation the same cells' saturation in the interval
+     * @return the face flows
+     */
+    FaceFlows faceFlows(int interval, CellGeometry geometry, Saturation saturation);
+
+    /**
+     * {@return whether nothing can flow through the grid's outer sides because the set says so}
+     */
+    boolean closedSides();
+}

@@ -1,0 +1,101 @@
+package org.seepledger.aquifer;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.seepledger.fault.DataFault;
+
+/**
+ * A well in its cell. It is taken a hundred-millionth of a cell east and a billionth north of its place, so that it
+ * never lies on a side or a grid line.
+ *
+ * @param well the well
+ * @param row its row in the grid
+ * @param column its column in the grid
+ * @param across how far it lies along x in its cell, from 0 in the west to 1
+ * @param up how far it lies along y in its cell, from 0 in the south to 1
+ */
+public record PlacedWell(Well well, int row, int column, double across, double up) {
+
+    private static final double EAST = 1e-8;
+    private static final double NORTH = 1e-9;
+
+    /**
+     * {@return a well in its cell}
+     *
+     * @param well the well
+     * @param grid the grid
+     * @throws DataFault if it lies outside the grid
+     */
+    public static PlacedWell of(Well well, Grid grid) {
+        double x = grid.x().snapped(grid.localX(well.x(), well.y()));
+        double y = grid.y().snapped(grid.localY(well.x(), well.y()));
+        int column = grid.x().cellAt(x);
+        int fromSouth = grid.y().cellAt(y);
+        if (column < 0 || column >= grid.columns() || fromSouth < 0 || fromSouth >= grid.rows()) {
+            throw new DataFault(
+                    well.schedule().get(0).place(),
+                    "well \"" + well.name() + "\"",
+                    "the place " + well.x() + ", " + well.y() + " outside the grid",
+                    "a place inside the grid",
+                    "Correct the coordinates, or leave the well out.");
+        }
+        return new PlacedWell(
+                well,
+                grid.flipped(fromSouth),
+                column,
+                inside((x - grid.x().edge(column)) / grid.x().size(column), EAST),
+                inside((y - grid.y().edge(fromSouth)) / grid.y().size(fromSouth), NORTH));
+    }
+
+    private static double inside(double place, double shift) {
+        return place + shift < 1 ? place + shift : 1 - shift;
+    }
+
+    /**
+     * Shares the mean rate of an interval out over the well's layers: by the length of screen in each active cell.
+     *
+     * @param rate the well's mean rate, length³/time, not 0
+     * @param geometry a block of cells that holds the well's
+     * @param active whether each of them is active
+     * @return a rate per layer that the well reaches
+     * @throws DataFault if the screen reaches no active cell
+     */
+    List<WellRate> shares(double rate, CellGeometry geometry, boolean[] active) {
+        double[] lengths = new double[geometry.block().layers()];
+        double total = 0;
+        for (int layer = 0; layer < lengths.length; layer++) {
+            int cell = geometry.block().cell(layer, row, column);
+            lengths[layer] = active[cell] ? screened(layer, geometry.top(cell), geometry.bottom(cell)) : 0;
+            total += lengths[layer];
+        }
+        if (!(total > 0)) {
+            throw inInactiveCell();
+        }
+        List<WellRate> rates = new ArrayList<>();
+        for (int layer = 0; layer < lengths.length; layer++) {
+            if (lengths[layer] > 0) {
+                rates.add(new WellRate(this, layer, rate * (lengths[layer] / total)));
+            }
+        }
+        return rates;
+    }
+
+    private double screened(int layer, double top, double bottom) {
+        if (well.screen() instanceof Screen.Between between) {
+            return Math.max(0, Math.min(top, between.top()) - Math.max(bottom, between.bottom()));
+        }
+        return ((Screen.InLayer) well.screen()).layer() == layer ? 1 : 0;
+    }
+
+    private DataFault inInactiveCell() {
+        String where = well.screen() instanceof Screen.InLayer in
+                ? "layer " + (in.layer() + 1) + ", row " + (row + 1) + ", column " + (column + 1)
+                : "row " + (row + 1) + ", column " + (column + 1);
+        return new DataFault(
+                well.schedule().get(0).place(),
+                "well \"" + well.name() + "\"",
+                "no active cell behind its screen (" + where + ")",
+                "a well in an active cell",
+                "Correct its place or layer, or leave it out while the cell is inactive.");
+    }
+}

@@ -1,0 +1,66 @@
+package org.seepledger.balance;
+
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import org.seepledger.aquifer.CellTerm;
+import org.seepledger.aquifer.FaceMismatch;
+import org.seepledger.aquifer.IntervalState;
+
+/** What one band, or all bands together, came to. */
+final class BandResult {
+
+    private final List<List<Tally>> tallies = new ArrayList<>();
+    private final List<Map<String, Uncounted>> uncounted = new ArrayList<>();
+    private FaceMismatch mismatch;
+
+    BandResult(List<PrismAccounts> prisms, int intervals) {
+        for (int interval = 0; interval < intervals; interval++) {
+            tallies.add(prisms.stream().map(PrismAccounts::emptyTally).toList());
+            uncounted.add(new LinkedHashMap<>());
+        }
+    }
+
+    Tally tally(int interval, int prism) {
+        return tallies.get(interval).get(prism);
+    }
+
+    void note(int interval, IntervalState state) {
+        for (CellTerm term : state.terms()) {
+            uncounted.get(interval).merge(term.item(), new Uncounted(term.missing(), term.lost()), Uncounted::plus);
+        }
+        state.flows().mismatch().ifPresent(this::note);
+    }
+
+    private void note(FaceMismatch found) {
+        if (mismatch == null || found.difference() > mismatch.difference()) {
+            mismatch = found;
+        }
+    }
+
+    void add(BandResult other) {
+        for (int interval = 0; interval < tallies.size(); interval++) {
+            for (int prism = 0; prism < tallies.get(interval).size(); prism++) {
+                tally(interval, prism).add(other.tally(interval, prism));
+            }
+            Map<String, Uncounted> own = uncounted.get(interval);
+            other.uncounted.get(interval).forEach((item, more) -> own.merge(item, more, Uncounted::plus));
+        }
+        if (other.mismatch != null) {
+            note(other.mismatch);
+        }
+    }
+
+    /** The greatest difference between two given values of one face; null if there is none. */
+    FaceMismatch mismatch() {
+        return mismatch;
+    }
+
+    /** What was not counted of each source, in the interval where it was most. */
+    Map<String, Uncounted> uncounted() {
+        Map<String, Uncounted> worst = new LinkedHashMap<>();
+        uncounted.forEach(ofInterval -> ofInterval.forEach((item, it) -> worst.merge(item, it, Uncounted::larger)));
+        return worst;
+    }
+}

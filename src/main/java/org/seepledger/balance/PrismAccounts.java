@@ -1,0 +1,157 @@
+package org.seepledger.balance;
+
+import java.util.HashMap;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import org.seepledger.aquifer.Aquifer;
+import org.seepledger.aquifer.Block;
+import org.seepledger.aquifer.CellGeometry;
+import org.seepledger.aquifer.CellTerm;
+import org.seepledger.aquifer.FaceFlows;
+import org.seepledger.aquifer.IntervalState;
+import org.seepledger.aquifer.PlacedWell;
+import org.seepledger.aquifer.WellRate;
+import org.seepledger.aquifer.Window;
+import org.seepledger.prism.Coverage;
+import org.seepledger.prism.Pieces;
+import org.seepledger.prism.PrismCut;
+import org.seepledger.prism.WellCut;
+
+/** Books the flows of one prism, band by band. */
+final class PrismAccounts {
+
+    private final PrismCut cut;
+    private final Chart chart;
+    private final WellRule rule;
+    private final Map<PlacedWell, WellCut> wells = new LinkedHashMap<>();
+
+    PrismAccounts(Aquifer aquifer, PrismCut cut, List<PlacedWell> wells, WellRule rule) {
+        this.cut = cut;
+        this.chart = new Chart(aquifer, cut);
+        this.rule = rule;
+        wells.forEach(well -> this.wells.put(well, cut.meet(well)));
+    }
+
+    PrismCut cut() {
+        return cut;
+    }
+
+    Chart chart() {
+        return chart;
+    }
+
+    Map<PlacedWell, WellCut> wells() {
+        return wells;
+    }
+
+    Tally emptyTally() {
+        return new Tally(chart.accounts().size(), chart.layers());
+    }
+
+    /** Books what one band of rows holds of the prism in one interval. */
+    void book(IntervalState state, Tally tally) {
+        bookPieces(state, tally);
+        Window rows = state.geometry().inner();
+        Coverage coverage = cut.coverage();
+        int from = Math.max(rows.row(), coverage.window().row());
+        int to = Math.min(rows.rowEnd(), coverage.window().rowEnd());
+        for (int row = from; row < to; row++) {
+            for (int column = coverage.firstColumn(row); column < coverage.columnEnd(row); column++) {
+                double share = coverage.share(row, column);
+                if (share != 0) {
+                    bookLids(state, row, column, share, tally);
+                    bookCells(state, row, column, share, tally);
+                }
+            }
+        }
+        bookWells(state, tally);
+    }
+
+    private void bookPieces(IntervalState state, Tally tally) {
+        FaceFlows flows = state.flows();
+        Block block = flows.block();
+        Pieces pieces = cut.pieces();
+        Map<Integer, double[]> carried = carriedForWells(state.wells());
+        int end = pieces.firstFrom(state.geometry().inner().rowEnd());
+        for (int piece = pieces.firstFrom(state.geometry().inner().row()); piece < end; piece++) {
+            int row = pieces.row(piece);
+            int column = pieces.column(piece);
+            double[] extra = carried.get(piece);
+            for (int layer = chart.first(); layer <= chart.last(); layer++) {
+                double west = flows.x()[block.xFace(layer, row, column)];
+                double east = flows.x()[block.xFace(layer, row, column + 1)];
+                double south = flows.y()[block.yFace(layer, row + 1, column)];
+                double north = flows.y()[block.yFace(layer, row, column)];
+                double more = extra == null ? 0 : extra[layer - chart.first()];
+                tally.throughPiece(
+                        chart.side(cut.item(pieces.side(piece)), layer),
+                        pieces.outflowAtStart(piece, west, east, south, north) + more,
+                        pieces.outflowAtEnd(piece, west, east, south, north) + more);
+            }
+        }
+    }
+
+    /** What pieces in wells' cells carry beside the cells' own fields, by piece and layer. */
+    private Map<Integer, double[]> carriedForWells(List<WellRate> rates) {
+        Map<Integer, double[]> carried = new HashMap<>();
+        if (rule == WellRule.SPREAD) {
+            return carried;
+        }
+        for (WellRate rate : rates) {
+            WellCut met = wells.get(rate.well());
+            if (chart.holds(rate.layer())) {
+                for (int i = 0; i < met.pieces().length; i++) {
+                    carried.computeIfAbsent(met.pieces()[i], piece -> new double[chart.layers()])[
+                                    rate.layer() - chart.first()] +=
+                            met.carried()[i] * rate.rate();
+                }
+            }
+        }
+        return carried;
+    }
+
+    private void bookLids(IntervalState state, int row, int column, double share, Tally tally) {
+        FaceFlows flows = state.flows();
+        CellGeometry geometry = state.geometry();
+        Block block = flows.block();
+        boolean open = false;
+        for (int layer = chart.first(); layer <= chart.last(); layer++) {
+            open |= !geometry.isPinchedOut(block.cell(layer, row, column));
+        }
+        if (open) {
+            tally.throughFace(chart.top(), share * flows.z()[block.zFace(chart.first(), row, column)]);
+            tally.throughFace(chart.bottom(), -share * flows.z()[block.zFace(chart.last() + 1, row, column)]);
+        }
+    }
+
+    private void bookCells(IntervalState state, int row, int column, double share, Tally tally) {
+        FaceFlows flows = state.flows();
+        for (int layer = chart.first(); layer <= chart.last(); layer++) {
+            int cell = flows.block().cell(layer, row, column);
+            if (!flows.active()[cell]) {
+                tally.inactive(
+                        layer - chart.first(), share * state.geometry().grid().area(row, column));
+                continue;
+            }
+            tally.fromVolume(-share * flows.gain(layer, row, column), flows.gross(layer, row, column));
+            for (CellTerm term : state.terms()) {
+                int account = term.storage() ? chart.storage(term.item(), layer) : chart.source(term.item(), layer);
+                tally.added(account, share * term.rates()[cell]);
+            }
+        }
+    }
+
+    private void bookWells(IntervalState state, Tally tally) {
+        for (WellRate rate : state.wells()) {
+            WellCut met = wells.get(rate.well());
+            if (!chart.holds(rate.layer())) {
+                continue;
+            }
+            double counted = rule == WellRule.SPREAD ? met.share() : met.inside() ? 1 : 0;
+            tally.added(chart.source(rate.well().well().category(), rate.layer()), counted * rate.rate());
+            tally.fromVolume(
+                    (counted - met.share()) * rate.rate(), met.pieces().length == 0 ? 0 : Math.abs(rate.rate()));
+        }
+    }
+}

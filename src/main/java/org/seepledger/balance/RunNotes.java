@@ -1,0 +1,105 @@
+package org.seepledger.balance;
+
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import org.seepledger.aquifer.Aquifer;
+import org.seepledger.aquifer.FaceMismatch;
+import org.seepledger.aquifer.PlacedWell;
+import org.seepledger.ledger.Group;
+import org.seepledger.prism.WellCut;
+
+/**
+ * What the reader of a balance must know beside its numbers.
+ *
+ * @param inactive area inside prisms that takes no part, where there is any
+ * @param closedSides items that lie wholly on closed outer faces, by prism
+ * @param cutWells wells in cells that a prism cuts
+ * @param uncounted what of each source was not counted, in the interval where it was most
+ * @param mismatch the greatest difference between two given values of one face
+ * @param disagreement the greatest difference between the two routes, as a share of gross flow
+ */
+public record RunNotes(
+        List<InactiveArea> inactive,
+        List<ClosedSide> closedSides,
+        List<CutWell> cutWells,
+        Map<String, Uncounted> uncounted,
+        Optional<FaceMismatch> mismatch,
+        double disagreement) {
+
+    /**
+     * Area inside a prism whose cells are inactive or pinched out.
+     *
+     * @param prism the prism
+     * @param layer the layer, from 0
+     * @param area length², in the interval where it is largest
+     */
+    public record InactiveArea(String prism, int layer, double area) {}
+
+    /**
+     * An item on a closed outer face of the grid.
+     *
+     * @param prism the prism
+     * @param item the item
+     */
+    public record ClosedSide(String prism, String item) {}
+
+    /**
+     * A well in a cell that a prism cuts.
+     *
+     * @param prism the prism
+     * @param well the well
+     * @param inside whether the prism holds it
+     */
+    public record CutWell(String prism, String well, boolean inside) {}
+
+    /** Copies the collections. */
+    public RunNotes {
+        inactive = List.copyOf(inactive);
+        closedSides = List.copyOf(closedSides);
+        cutWells = List.copyOf(cutWells);
+        uncounted = Collections.unmodifiableMap(new LinkedHashMap<>(uncounted));
+    }
+
+    static RunNotes of(Aquifer aquifer, List<PrismAccounts> prisms, BandResult total) {
+        List<InactiveArea> inactive = new ArrayList<>();
+        List<ClosedSide> closed = new ArrayList<>();
+        List<CutWell> wells = new ArrayList<>();
+        double disagreement = 0;
+        for (int prism = 0; prism < prisms.size(); prism++) {
+            PrismAccounts accounts = prisms.get(prism);
+            String name = accounts.cut().prism().name();
+            double[] areas = new double[accounts.chart().layers()];
+            for (int interval = 0; interval < aquifer.times().intervals(); interval++) {
+                Tally tally = total.tally(interval, prism);
+                disagreement = Math.max(disagreement, tally.disagreement());
+                double[] now = tally.inactiveArea();
+                for (int layer = 0; layer < areas.length; layer++) {
+                    areas[layer] = Math.max(areas[layer], now[layer]);
+                }
+            }
+            for (int layer = 0; layer < areas.length; layer++) {
+                if (areas[layer] > 0) {
+                    inactive.add(new InactiveArea(name, accounts.chart().first() + layer, areas[layer]));
+                }
+            }
+            accounts.chart().accounts().stream()
+                    .filter(account -> account.group() == Group.SIDE && !account.quantified())
+                    .map(account -> new ClosedSide(name, account.item()))
+                    .distinct()
+                    .forEach(closed::add);
+            accounts.wells().forEach((well, cut) -> addCutWell(wells, name, well, cut));
+        }
+        return new RunNotes(
+                inactive, closed, wells, total.uncounted(), Optional.ofNullable(total.mismatch()), disagreement);
+    }
+
+    private static void addCutWell(List<CutWell> wells, String prism, PlacedWell well, WellCut cut) {
+        if (cut.share() > 0 && cut.share() < 1) {
+            wells.add(new CutWell(prism, well.well().name(), cut.inside()));
+        }
+    }
+}

@@ -1,0 +1,96 @@
+package org.seepledger.balance;
+
+import org.seepledger.fault.ProgramFault;
+
+/**
+ * The running sums of one prism in one interval: gross rates by account, both routes to its net outflow, and the area of
+ * its cells that take no part.
+ */
+final class Tally {
+
+    private static final int FACES = 0;
+    private static final int VOLUME = 1;
+    private static final int GROSS = 2;
+
+    private final Sums inflow;
+    private final Sums outflow;
+    private final Sums routes = new Sums(3);
+    private final Sums inactiveArea;
+
+    Tally(int accounts, int layers) {
+        inflow = new Sums(accounts);
+        outflow = new Sums(accounts);
+        inactiveArea = new Sums(layers);
+    }
+
+    /** Books a flow through a boundary piece whose outflow density goes from start to end: in and out apart. */
+    void throughPiece(int account, double start, double end) {
+        double net = 0.5 * (start + end);
+        routes.add(FACES, net);
+        if (start >= 0 && end >= 0) {
+            outflow.add(account, net);
+        } else if (start <= 0 && end <= 0) {
+            inflow.add(account, -net);
+        } else {
+            double turn = start / (start - end);
+            double before = 0.5 * start * turn;
+            double after = 0.5 * end * (1 - turn);
+            outflow.add(account, Math.max(before, after));
+            inflow.add(account, -Math.min(before, after));
+        }
+    }
+
+    /** Books a uniform outflow through a face. */
+    void throughFace(int account, double out) {
+        routes.add(FACES, out);
+        (out >= 0 ? outflow : inflow).add(account, Math.abs(out));
+    }
+
+    /** Books what a source adds or storage releases; taken if negative. */
+    void added(int account, double rate) {
+        (rate >= 0 ? inflow : outflow).add(account, Math.abs(rate));
+    }
+
+    /** Counts what a part of the volume sends out, and the gross flow it is measured against. */
+    void fromVolume(double out, double gross) {
+        routes.add(VOLUME, out);
+        routes.add(GROSS, gross);
+    }
+
+    void inactive(int layer, double area) {
+        inactiveArea.add(layer, area);
+    }
+
+    void add(Tally other) {
+        inflow.add(other.inflow);
+        outflow.add(other.outflow);
+        routes.add(other.routes);
+        inactiveArea.add(other.inactiveArea);
+    }
+
+    double[] inflow() {
+        return inflow.toArray();
+    }
+
+    double[] outflow() {
+        return outflow.toArray();
+    }
+
+    double[] inactiveArea() {
+        return inactiveArea.toArray();
+    }
+
+    /** The difference between the two routes as a share of the gross flow; 0 where nothing flows. */
+    double disagreement() {
+        double difference = Math.abs(routes.get(FACES) - routes.get(VOLUME));
+        return difference == 0 ? 0 : difference / routes.get(GROSS);
+    }
+
+    /** Makes sure that both routes came to the same. */
+    void check(String prism, int interval, double allowed) {
+        if (!(disagreement() <= allowed)) {
+            throw new ProgramFault("Outflow through the faces of prism \"" + prism + "\" in interval " + (interval + 1)
+                    + " is " + routes.get(FACES) + ", but the integral over its volume is " + routes.get(VOLUME) + ".");
+        }
+    }
+}

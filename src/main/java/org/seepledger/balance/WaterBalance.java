@@ -1,0 +1,145 @@
+package org.seepledger.balance;
+
+import java.util.ArrayDeque;
+import java.util.ArrayList;
+import java.util.Deque;
+import java.util.List;
+import java.util.concurrent.ExecutionException;
+import java.util.concurrent.ExecutorService;
+import java.util.concurrent.Executors;
+import java.util.concurrent.Future;
+import org.seepledger.aquifer.Aquifer;
+import org.seepledger.aquifer.PlacedWell;
+import org.seepledger.aquifer.StorageKnowledge;
+import org.seepledger.aquifer.Window;
+import org.seepledger.ledger.Ledger;
+import org.seepledger.prism.Prism;
+import org.seepledger.prism.PrismCut;
+import org.seepledger.progress.Progress;
+
+/** Balances prisms in an aquifer: the work of one run. */
+public final class WaterBalance {
+
+    /** How far the two routes to a prism's outflow may differ, as a share of the gross flow through the cells touched. */
+    public static final double ROUTES_AGREE = 1e-12;
+
+    private static final int CELLS_IN_A_BAND = 1 << 18;
+
+    private final Aquifer aquifer;
+    private final List<PlacedWell> wells;
+    private final List<PrismAccounts> prisms;
+    private final Window window;
+
+    private WaterBalance(Aquifer aquifer, List<Prism> prisms, WellRule rule) {
+        this.aquifer = aquifer;
+        List<PrismCut> cuts =
+                prisms.stream().map(prism -> PrismCut.of(prism, aquifer.grid())).toList();
+        this.window = joint(cuts);
+        this.wells = aquifer.placedWells().stream()
+                .filter(well -> window.contains(well.row(), well.column()))
+                .toList();
+        this.prisms = cuts.stream()
+                .map(cut -> new PrismAccounts(aquifer, cut, wells, rule))
+                .toList();
+    }
+
+    /**
+     * Balances prisms over the whole record.
+     *
+     * @param aquifer the aquifer
+     * @param prisms at least one valid prism within the grid
+     * @param rule how wells in cut cells count
+     * @param threads how many threads may work; the result does not depend on it
+     * @param progress told of each band and interval
+     * @return the result
+     * @throws org.seepledger.fault.DataFault if the data are wrong
+     * @throws org.seepledger.fault.ProgramFault if an identity that must hold does not
+     * @throws org.seepledger.progress.Cancelled if the work was stopped
+     */
+    public static Balance of(Aquifer aquifer, List<Prism> prisms, WellRule rule, int threads, Progress progress) {
+        return new WaterBalance(aquifer, prisms, rule).work(threads, progress);
+    }
+
+    private static Window joint(List<PrismCut> cuts) {
+        int north = Integer.MAX_VALUE;
+        int west = Integer.MAX_VALUE;
+        int south = 0;
+        int east = 0;
+        for (PrismCut cut : cuts) {
+            Window window = cut.coverage().window();
+            north = Math.min(north, window.row());
+            west = Math.min(west, window.column());
+            south = Math.max(south, window.rowEnd());
+            east = Math.max(east, window.columnEnd());
+        }
+        return new Window(north, west, south - north, east - west);
+    }
+
+    private Balance work(int threads, Progress progress) {
+        Imbalance imbalance = new Imbalance(window, aquifer.layers().size());
+        List<Band> bands = bands().stream()
+                .map(rows -> new Band(aquifer, rows, prisms, wells, imbalance))
+                .toList();
+        progress.begin("balancing", (long) bands.size() * aquifer.times().intervals());
+        BandResult total = new BandResult(prisms, aquifer.times().intervals());
+        ExecutorService workers = Executors.newFixedThreadPool(threads, WaterBalance::daemon);
+        try {
+            Deque<Future<BandResult>> waiting = new ArrayDeque<>();
+            for (Band band : bands) {
+                waiting.add(workers.submit(() -> band.work(progress)));
+                if (waiting.size() > 2 * threads) {
+                    total.add(waiting.remove().get());
+                }
+            }
+            while (!waiting.isEmpty()) {
+                total.add(waiting.remove().get());
+            }
+        } catch (ExecutionException e) {
+            throw e.getCause() instanceof RuntimeException cause ? cause : new IllegalStateException(e.getCause());
+        } catch (InterruptedException e) {
+            Thread.currentThread().interrupt();
+            throw new IllegalStateException(e);
+        } finally {
+            workers.shutdownNow();
+        }
+        return new Balance(ledgers(total), imbalance, RunNotes.of(aquifer, prisms, total));
+    }
+
+    private static Thread daemon(Runnable work) {
+        Thread thread = new Thread(work, "balance");
+        thread.setDaemon(true);
+        return thread;
+    }
+
+    /** Bands of rows, aligned so that they fall together with the tiles of rasters. */
+    private List<Window> bands() {
+        int perRow = (window.columns() + 2) * aquifer.layers().size();
+        int height = Math.max(8, Integer.highestOneBit(Math.max(1, CELLS_IN_A_BAND / perRow)));
+        List<Window> bands = new ArrayList<>();
+        for (int row = window.row(); row < window.rowEnd(); ) {
+            int end = Math.min(window.rowEnd(), (row / height + 1) * height);
+            bands.add(new Window(row, window.column(), end - row, window.columns()));
+            row = end;
+        }
+        return bands;
+    }
+
+    private List<Ledger> ledgers(BandResult total) {
+        int intervals = aquifer.times().intervals();
+        boolean known = aquifer.storageKnowledge() != StorageKnowledge.UNKNOWN;
+        List<Ledger> ledgers = new ArrayList<>();
+        for (int prism = 0; prism < prisms.size(); prism++) {
+            String name = prisms.get(prism).cut().prism().name();
+            double[][] inflow = new double[intervals][];
+            double[][] outflow = new double[intervals][];
+            for (int interval = 0; interval < intervals; interval++) {
+                Tally tally = total.tally(interval, prism);
+                tally.check(name, interval, ROUTES_AGREE);
+                inflow[interval] = tally.inflow();
+                outflow[interval] = tally.outflow();
+            }
+            ledgers.add(new Ledger(name, prisms.get(prism).chart().accounts(), known, inflow, outflow));
+        }
+        return ledgers;
+    }
+}

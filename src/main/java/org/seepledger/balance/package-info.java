@@ -1,0 +1,12 @@
+/**
+ * The balance: an aquifer and cut prisms become ledgers.
+ *
+ * <p>The work is done by interval and band of rows, within the prisms' joint window. Outflow through a prism's faces is
+ * worked out twice, by different routes: piece by piece along its boundary, and as the integral of the cells' own gains
+ * over its volume. In the lowest-order field of Raviart and Thomas (1977) the two are the same for any polygon; a
+ * difference beyond {@value org.seepledger.balance.WaterBalance#ROUTES_AGREE} of the gross flow through the faces of
+ * the cells touched is a fault of the program, and no result is given out.
+ *
+ * <p>Sums run in a fixed order that does not depend on the number of threads, and are compensated (Neumaier 1974).
+ */
+package org.seepledger.balance;

@@ -1,0 +1,11 @@
+package org.seepledger.ledger;
+
+/**
+ * What a row of a budget is about.
+ *
+ * @param group its kind
+ * @param item the side, lid, category or storage item
+ * @param layer the layer, from 0
+ * @param quantified whether its numbers can be given
+ */
+public record Account(Group group, String item, int layer, boolean quantified) {}

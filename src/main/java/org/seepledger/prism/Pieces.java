@@ -1,0 +1,189 @@
+package org.seepledger.prism;
+
+import java.util.Arrays;
+import java.util.Comparator;
+import java.util.List;
+
+/**
+ * The pieces that the grid lines cut a prism's sides into, sorted by row, northernmost first, and in the order of the
+ * walk within a row.
+ *
+ * <p>A piece runs from P to Q in one cell; places in a cell go from 0 to 1, across from west to east and up from south
+ * to north. The outward normal is on its right. With west, east, south and north the flows through the cell's faces
+ * (length³/time, positive toward +x and +y), the outflow through the piece is linear along it, from
+ * {@link #outflowAtStart} to {@link #outflowAtEnd} per unit of its parameter: the lowest-order field of Raviart and
+ * Thomas (1977).
+ */
+public final class Pieces {
+
+    private final int[] rows;
+    private final int[] columns;
+    private final int[] sides;
+    private final double[] startAcross;
+    private final double[] startUp;
+    private final double[] endAcross;
+    private final double[] endUp;
+
+    /**
+     * One piece, while the pieces are being collected.
+     *
+     * @param row its cell's row
+     * @param column its cell's column
+     * @param side which side of the prism, counted through all rings
+     * @param startAcross where it begins in the cell
+     * @param startUp where it begins
+     * @param endAcross where it ends
+     * @param endUp where it ends
+     */
+    record Piece(int row, int column, int side, double startAcross, double startUp, double endAcross, double endUp) {}
+
+    Pieces(List<Piece> walked) {
+        Piece[] sorted = walked.toArray(Piece[]::new);
+        Arrays.sort(sorted, Comparator.comparingInt(Piece::row));
+        rows = Arrays.stream(sorted).mapToInt(Piece::row).toArray();
+        columns = Arrays.stream(sorted).mapToInt(Piece::column).toArray();
+        sides = Arrays.stream(sorted).mapToInt(Piece::side).toArray();
+        startAcross = Arrays.stream(sorted).mapToDouble(Piece::startAcross).toArray();
+        startUp = Arrays.stream(sorted).mapToDouble(Piece::startUp).toArray();
+        endAcross = Arrays.stream(sorted).mapToDouble(Piece::endAcross).toArray();
+        endUp = Arrays.stream(sorted).mapToDouble(Piece::endUp).toArray();
+    }
+
+    /**
+     * {@return the number of pieces}
+     */
+    public int count() {
+        return rows.length;
+    }
+
+    /**
+     * {@return the first piece in a row or below it; the number of pieces if there is none}
+     *
+     * @param row a row of the grid
+     */
+    public int firstFrom(int row) {
+        int low = 0;
+        int high = rows.length;
+        while (low < high) {
+            int middle = (low + high) >>> 1;
+            if (rows[middle] < row) {
+                low = middle + 1;
+            } else {
+                high = middle;
+            }
+        }
+        return low;
+    }
+
+    /**
+     * {@return a piece's row in the grid}
+     *
+     * @param piece from 0
+     */
+    public int row(int piece) {
+        return rows[piece];
+    }
+
+    /**
+     * {@return a piece's column in the grid}
+     *
+     * @param piece from 0
+     */
+    public int column(int piece) {
+        return columns[piece];
+    }
+
+    /**
+     * {@return which side a piece belongs to, counted through all rings}
+     *
+     * @param piece from 0
+     */
+    public int side(int piece) {
+        return sides[piece];
+    }
+
+    /**
+     * {@return how far a piece goes across its cell, from -1 to 1}
+     *
+     * @param piece from 0
+     */
+    public double across(int piece) {
+        return endAcross[piece] - startAcross[piece];
+    }
+
+    /**
+     * {@return how far a piece goes up its cell, from -1 to 1}
+     *
+     * @param piece from 0
+     */
+    public double up(int piece) {
+        return endUp[piece] - startUp[piece];
+    }
+
+    /**
+     * {@return the share of a piece's cell between the piece and the cell's west face}
+     *
+     * @param piece from 0
+     */
+    double shareToTheWest(int piece) {
+        return 0.5 * (startAcross[piece] + endAcross[piece]) * up(piece);
+    }
+
+    /**
+     * {@return the outflow density where a piece begins, length³/time over its whole length}
+     *
+     * @param piece from 0
+     * @param west flow through the cell's west face
+     * @param east through its east face
+     * @param south through its south face
+     * @param north through its north face
+     */
+    public double outflowAtStart(int piece, double west, double east, double south, double north) {
+        return (west + (east - west) * startAcross[piece]) * up(piece)
+                - (south + (north - south) * startUp[piece]) * across(piece);
+    }
+
+    /**
+     * {@return the outflow density where a piece ends, length³/time over its whole length}
+     *
+     * @param piece from 0
+     * @param west flow through the cell's west face
+     * @param east through its east face
+     * @param south through its south face
+     * @param north through its north face
+     */
+    public double outflowAtEnd(int piece, double west, double east, double south, double north) {
+        return (west + (east - west) * endAcross[piece]) * up(piece)
+                - (south + (north - south) * endUp[piece]) * across(piece);
+    }
+
+    /**
+     * {@return whether a piece lies on an outer side of the grid}
+     *
+     * @param piece from 0
+     * @param lastRow the grid's last row
+     * @param lastColumn the grid's last column
+     */
+    boolean isOnEdge(int piece, int lastRow, int lastColumn) {
+        return lies(startAcross, endAcross, piece, 0) && columns[piece] == 0
+                || lies(startAcross, endAcross, piece, 1) && columns[piece] == lastColumn
+                || lies(startUp, endUp, piece, 1) && rows[piece] == 0
+                || lies(startUp, endUp, piece, 0) && rows[piece] == lastRow;
+    }
+
+    private static boolean lies(double[] starts, double[] ends, int piece, double at) {
+        return starts[piece] == at && ends[piece] == at;
+    }
+
+    /**
+     * {@return the share of a piece's cell that lies behind the piece, seen from a place in that cell: positive where the
+     * place is on the piece's inner side}
+     *
+     * @param piece from 0
+     * @param across the place
+     * @param up the place
+     */
+    double shareBehind(int piece, double across, double up) {
+        return new Sector(across, up).behind(startAcross[piece], startUp[piece], endAcross[piece], endUp[piece]);
+    }
+}
