@@ -149,6 +149,7 @@ public final class Measure {
 
     private static Map<String, Unit<?>> named() {
         Map<String, Unit<?>> units = new LinkedHashMap<>();
+        units.put("1", AbstractUnit.ONE);
         Unit<?> cubicMetre = Units.METRE.pow(3);
         units.put("ha", Units.METRE.pow(2).multiply(10_000));
         units.put("acre", INTERNATIONAL_FOOT.pow(2).multiply(43_560));

@@ -1,0 +1,96 @@
+package org.seepledger.io.aquifer;
+
+import java.io.IOException;
+import java.io.InputStream;
+import java.io.UncheckedIOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.LinkedHashMap;
+import java.util.Map;
+import java.util.Optional;
+import java.util.concurrent.ConcurrentHashMap;
+import org.seepledger.aquifer.Grid;
+import org.seepledger.io.DataFolder;
+import org.seepledger.io.raster.GeoTiff;
+import org.seepledger.io.raster.GridMatch;
+import org.seepledger.io.raster.RasterFiles;
+import org.seepledger.io.table.Frame;
+import org.seepledger.io.table.GriddedTable;
+import org.seepledger.io.table.Repeats;
+
+/** The data files of one aquifer folder: each found once, matched to the grid once, open until closed. */
+public final class DataFiles implements AutoCloseable {
+
+    private final DataFolder folder;
+    private final RasterFiles rasters = new RasterFiles();
+    private final Map<String, Path> found = new ConcurrentHashMap<>();
+    private final Map<String, Path> inOrder = new LinkedHashMap<>();
+    private final Map<String, GriddedTable> tables = new LinkedHashMap<>();
+    private Optional<String> shapeNote = Optional.empty();
+    private int matchedByShape;
+
+    DataFiles(DataFolder folder) {
+        this.folder = folder;
+    }
+
+    /** The file that a name means; remembered as read. */
+    Path path(String name, String place) {
+        Path path = found.computeIfAbsent(name, key -> folder.resolve(key, place));
+        inOrder.putIfAbsent(name, path);
+        return path;
+    }
+
+    boolean isRaster(String name, String place) {
+        try (InputStream start = Files.newInputStream(path(name, place))) {
+            byte[] mark = start.readNBytes(2);
+            return mark.length == 2 && mark[0] == mark[1] && (mark[0] == 'I' || mark[0] == 'M')
+                    || name.toLowerCase(java.util.Locale.ROOT).matches(".*\\.tiff?");
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+
+    /** A raster, found before; the caller closes it. */
+    GeoTiff raster(String name) {
+        return rasters.open(found.get(name), name);
+    }
+
+    /** Opens a raster for the first time, and makes sure that its cells are the grid's. */
+    int matchedBands(String name, String place, Grid grid) {
+        path(name, place);
+        try (GeoTiff raster = raster(name)) {
+            Optional<String> note = GridMatch.check(raster, name, grid);
+            matchedByShape += note.isPresent() ? 1 : 0;
+            shapeNote = shapeNote.or(() -> note);
+            return raster.bands();
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+
+    GriddedTable table(String name, String place, Frame frame, Repeats repeats) {
+        Path path = path(name, place);
+        return tables.computeIfAbsent(
+                name + "/" + repeats, key -> GriddedTable.open(path, name, frame, repeats));
+    }
+
+    /** A note where rasters were matched by their shape alone. */
+    Optional<String> shapeNote() {
+        return shapeNote.map(note -> matchedByShape == 1 ? note : note + " (so are " + (matchedByShape - 1) + " more)");
+    }
+
+    /** The files read so far, in order of first mention. */
+    Map<String, Path> inputs() {
+        return inOrder;
+    }
+
+    @Override
+    public void close() {
+        tables.values().forEach(GriddedTable::close);
+        try {
+            rasters.close();
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+}

@@ -1,0 +1,114 @@
+package org.seepledger.io.aquifer;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.seepledger.aquifer.DarcyFlux;
+import org.seepledger.aquifer.Flow;
+import org.seepledger.aquifer.GivenFaceFlow;
+import org.seepledger.aquifer.GriddedValues;
+import org.seepledger.aquifer.OuterFaces;
+import org.seepledger.fault.DataFault;
+import org.seepledger.io.table.StepKind;
+import org.seepledger.unit.Measure;
+
+/** Reads the {@code flow} of a set. */
+final class FlowReader {
+
+    private static final List<String> SHARED = List.of("kind", "at", "origin", "reference", "uncertainty");
+    private static final List<String> DARCY = List.of("x", "y", "z", "components", "outer_faces");
+    private static final List<String> FACES = List.of("east", "north", "up", "west", "south", "down");
+
+    private final JsonNode node;
+    private final Bindings bindings;
+    private final Measure velocity;
+    private final Measure rate;
+    private final List<String> warnings;
+    private final boolean snapshots;
+
+    FlowReader(JsonNode node, Bindings bindings, Measure length, Measure time, List<String> warnings) {
+        this.node = node;
+        this.bindings = bindings;
+        this.velocity = length.per(time);
+        this.rate = Measure.power(length, 3).per(time);
+        this.warnings = warnings;
+        this.snapshots = node.path("at").asText().equals("instant");
+    }
+
+    Flow read() {
+        if (snapshots) {
+            warnings.add("Flow is given as snapshots at instants; each interval takes the mean of its two ends, which is not"
+                    + " the interval's own mean.");
+        }
+        String kind = node.get("kind").textValue();
+        return switch (kind) {
+            case "darcy_flux" -> darcyFlux();
+            case "face_flow" -> faceFlow();
+            default -> throw new DataFault(
+                    AquiferReader.FILE,
+                    "flow.kind",
+                    "\"" + kind + "\", which this version does not compute yet",
+                    "\"darcy_flux\" or \"face_flow\"",
+                    "Give the specific discharge or the face flows that the heads lead to.");
+        };
+    }
+
+    private Flow darcyFlux() {
+        onlyKeys(DARCY);
+        JsonNode outer = node.path("outer_faces");
+        return new DarcyFlux(
+                values("x", velocity),
+                values("y", velocity),
+                vertical("z", velocity),
+                node.path("components").asText().equals("map"),
+                new OuterFaces(open(outer, "sides", true), open(outer, "top", false), open(outer, "bottom", false)));
+    }
+
+    private Flow faceFlow() {
+        onlyKeys(FACES);
+        return new GivenFaceFlow(
+                values("east", rate),
+                values("north", rate),
+                vertical("up", rate),
+                optional("west", rate),
+                optional("south", rate),
+                optional("down", rate));
+    }
+
+    private void onlyKeys(List<String> own) {
+        List<String> known = new ArrayList<>(SHARED);
+        known.addAll(own);
+        node.fieldNames().forEachRemaining(key -> {
+            if (!known.contains(key)) {
+                throw new DataFault(
+                        AquiferReader.FILE,
+                        "flow",
+                        "\"" + key + "\" with a flow of kind \"" + node.get("kind").textValue() + "\"",
+                        "only " + known,
+                        "Take it out, or correct the kind.");
+            }
+        });
+    }
+
+    private Optional<GriddedValues> vertical(String key, Measure unit) {
+        if (!node.has(key) && bindings.frame().layers() > 1) {
+            warnings.add("No vertical flow is given (flow." + key + "); it is taken as 0 between layers.");
+        }
+        return optional(key, unit);
+    }
+
+    private Optional<GriddedValues> optional(String key, Measure unit) {
+        return node.has(key) ? Optional.of(values(key, unit)) : Optional.empty();
+    }
+
+    private GriddedValues values(String key, Measure unit) {
+        StepKind steps = snapshots ? StepKind.INSTANT : StepKind.INTERVAL;
+        GriddedValues values = bindings.values("flow " + key, node.get(key), "flow." + key, unit, steps);
+        return snapshots ? GriddedValues.meanOfEnds(values) : values;
+    }
+
+    private static boolean open(JsonNode outer, String key, boolean preset) {
+        return outer.has(key) ? outer.get(key).textValue().equals("open") : preset;
+    }
+}

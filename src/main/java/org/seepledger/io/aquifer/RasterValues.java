@@ -1,0 +1,40 @@
+package org.seepledger.io.aquifer;
+
+import java.io.IOException;
+import java.io.UncheckedIOException;
+import org.seepledger.aquifer.GriddedValues;
+import org.seepledger.aquifer.Window;
+import org.seepledger.io.raster.GeoTiff;
+
+/**
+ * Values from rasters: one file, or one for each layer or step where the name holds a placeholder.
+ *
+ * @param files where the files are
+ * @param name the file's name, with placeholders
+ * @param band which band holds what
+ * @param conversion from stored values to the set's units
+ */
+record RasterValues(DataFiles files, String name, BandRule band, Conversion conversion)
+        implements GriddedValues {
+
+    @Override
+    public void read(int layer, int step, Window window, double[] target, int offset) {
+        try (GeoTiff raster = files.raster(FileName.of(name, layer, step))) {
+            int index = band.index(layer, step);
+            raster.readStored(index, window, target, offset);
+            conversion.apply(raster.scale(index), raster.offset(index), target, offset, window.size());
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+
+    @Override
+    public boolean changes() {
+        return band.changes() || FileName.changes(name);
+    }
+
+    @Override
+    public boolean layered() {
+        return band.layered() || FileName.layered(name);
+    }
+}

@@ -1,0 +1,146 @@
+package org.seepledger.io.result;
+
+import java.io.IOException;
+import java.io.Writer;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.time.LocalDateTime;
+import java.time.format.DateTimeFormatter;
+import java.util.List;
+import org.apache.commons.csv.CSVFormat;
+import org.apache.commons.csv.CSVPrinter;
+import org.seepledger.aquifer.Times;
+import org.seepledger.io.table.CsvText;
+import org.seepledger.ledger.Entry;
+import org.seepledger.ledger.Group;
+import org.seepledger.ledger.Period;
+import org.seepledger.ledger.PeriodBudget;
+import org.seepledger.ledger.Totals;
+
+/** Writes {@code budget.csv}: notes, a header, tidy rows by prism, period and account, then the totals. */
+public final class BudgetCsv {
+
+    private static final String[] HEADER = {
+        "prism", "period", "from", "to", "from_date", "to_date", "group", "item", "layer", "inflow_rate", "outflow_rate",
+        "net_rate", "inflow_volume", "outflow_volume", "net_volume", "rate_unit", "volume_unit"
+    };
+    private static final String ALL_LAYERS = "*";
+    private static final String NONE = "";
+
+    private final Times times;
+    private final ResultUnits units;
+    private final CSVPrinter rows;
+
+    private BudgetCsv(Times times, ResultUnits units, CSVPrinter rows) {
+        this.times = times;
+        this.units = units;
+        this.rows = rows;
+    }
+
+    /**
+     * Writes the table.
+     *
+     * @param file the file, which must not exist
+     * @param statement what stands before the rows
+     * @param budgets the budgets of each prism
+     * @param times the record's instants, for dates
+     * @param units the units to give
+     * @throws IOException if it cannot be written
+     */
+    public static void write(
+            Path file, Statement statement, List<PrismBudget> budgets, Times times, ResultUnits units)
+            throws IOException {
+        CSVFormat format = CSVFormat.RFC4180.builder().setHeader().get();
+        try (Writer text = Files.newBufferedWriter(file)) {
+            for (String line : statement.lines()) {
+                text.write("# " + line + "\r\n");
+            }
+            CSVPrinter printer = new CSVPrinter(text, format);
+            printer.printRecord((Object[]) HEADER);
+            BudgetCsv table = new BudgetCsv(times, units, printer);
+            for (PrismBudget prism : budgets) {
+                for (PeriodBudget budget : prism.periods()) {
+                    table.write(prism.prism(), budget);
+                }
+            }
+        }
+    }
+
+    private void write(String prism, PeriodBudget budget) throws IOException {
+        Period period = budget.period();
+        for (Entry entry : budget.entries()) {
+            String layer = String.valueOf(entry.account().layer() + 1);
+            begin(prism, period, entry.account().group(), entry.account().item(), layer);
+            for (double volume : new double[] {entry.inflow(), entry.outflow(), entry.net()}) {
+                rows.print(rate(volume, period));
+            }
+            for (double volume : new double[] {entry.inflow(), entry.outflow(), entry.net()}) {
+                rows.print(volume(volume));
+            }
+            end(units.rate().toString(), units.volume().toString());
+        }
+        Totals totals = budget.totals();
+        total(prism, period, "inflow", totals.inflow());
+        total(prism, period, "outflow", totals.outflow());
+        total(prism, period, "storage change", totals.storageChange());
+        total(prism, period, "residual", totals.residual());
+        if (Double.isNaN(totals.storageChange())) {
+            total(prism, period, "unexplained, storage included", totals.inflow() - totals.outflow());
+        }
+        percent(prism, period, "closure error", totals.closureError());
+        percent(prism, period, "net closure error", totals.netClosureError());
+    }
+
+    private void total(String prism, Period period, String item, double volume) throws IOException {
+        begin(prism, period, Group.TOTAL, item, ALL_LAYERS);
+        nets(rate(volume, period), volume(volume));
+        end(units.rate().toString(), units.volume().toString());
+    }
+
+    private void percent(String prism, Period period, String item, double value) throws IOException {
+        begin(prism, period, Group.TOTAL, item, ALL_LAYERS);
+        nets(CsvText.number(value), NONE);
+        end("%", NONE);
+    }
+
+    private void nets(String rate, String volume) throws IOException {
+        for (String cell : new String[] {NONE, NONE, rate, NONE, NONE, volume}) {
+            rows.print(cell);
+        }
+    }
+
+    private void begin(String prism, Period period, Group group, String item, String layer) throws IOException {
+        rows.print(CsvText.text(prism));
+        rows.print(CsvText.text(period.name()));
+        rows.print(CsvText.number(period.from()));
+        rows.print(CsvText.number(period.to()));
+        rows.print(date(period.from()));
+        rows.print(date(period.to()));
+        rows.print(group.toString());
+        rows.print(CsvText.text(item));
+        rows.print(layer);
+    }
+
+    private void end(String rateUnit, String volumeUnit) throws IOException {
+        rows.print(rateUnit);
+        rows.print(volumeUnit);
+        rows.println();
+    }
+
+    private String rate(double volume, Period period) {
+        return CsvText.number(volume / period.duration() * units.rateFactor());
+    }
+
+    private String volume(double volume) {
+        return CsvText.number(volume * units.volumeFactor());
+    }
+
+    private String date(double time) {
+        return times.date(time).map(BudgetCsv::iso).orElse(NONE);
+    }
+
+    private static String iso(LocalDateTime date) {
+        boolean midnight = date.equals(date.toLocalDate().atStartOfDay());
+        return midnight ? date.toLocalDate().toString() : DateTimeFormatter.ISO_LOCAL_DATE_TIME.format(date);
+    }
+}
