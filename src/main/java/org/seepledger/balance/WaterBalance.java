@@ -102,7 +102,12 @@ public final class WaterBalance {
         } finally {
             workers.shutdownNow();
         }
-        return new Balance(ledgers(total), imbalance, RunNotes.of(aquifer, prisms, total));
+        return new Balance(
+                ledgers(total),
+                prisms.stream().map(PrismAccounts::cut).toList(),
+                imbalance,
+                prisms.stream().map(prism -> Whereabouts.of(prism, imbalance)).toList(),
+                RunNotes.of(aquifer, prisms, total));
     }
 
     private static Thread daemon(Runnable work) {

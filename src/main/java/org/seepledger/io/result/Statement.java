@@ -13,7 +13,7 @@ import org.seepledger.ledger.Disclaimer;
  * @param origins where its terms come from
  * @param warnings what the reader must know
  */
-public record Statement(String title, List<Input> inputs, List<Provenance> origins, List<String> warnings) {
+public record Statement(String title, List<FileRecord> inputs, List<Provenance> origins, List<String> warnings) {
 
     private static final String METHOD = "Method: face flows of each cell as a lowest-order Raviart-Thomas field,"
             + " integrated exactly along the polygon's sides and lids; gross in and out are kept per boundary piece,"

@@ -1,0 +1,157 @@
+package org.seepledger.job;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import java.io.IOException;
+import java.io.UncheckedIOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.nio.file.StandardCopyOption;
+import java.util.ArrayList;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Set;
+import java.util.stream.Stream;
+import org.seepledger.fault.DataFault;
+import org.seepledger.fault.UsageFault;
+import org.seepledger.io.JsonFile;
+import org.seepledger.io.result.RunJson;
+
+/**
+ * The folder that a run's files go to. They are built in a folder aside and moved into place when all are there, the run
+ * record last; a run that ends early leaves nothing behind.
+ */
+final class OutputFolder implements AutoCloseable {
+
+    private final Path target;
+    private final Path aside;
+    private final Set<String> replaceable;
+
+    private OutputFolder(Path target, Path aside, Set<String> replaceable) {
+        this.target = target;
+        this.aside = aside;
+        this.replaceable = replaceable;
+    }
+
+    /**
+     * Prepares a folder.
+     *
+     * @param target where the files are to go: a new or empty folder, or with {@code overwrite} one that an earlier run
+     *     wrote
+     * @param overwrite whether the files that its run record names may be replaced
+     * @return the folder, to be closed
+     * @throws UsageFault if the folder cannot be used
+     */
+    static OutputFolder at(Path target, boolean overwrite) {
+        Path absolute = target.toAbsolutePath().normalize();
+        Set<String> replaceable = replaceable(target, overwrite);
+        try {
+            Files.createDirectories(absolute.getParent());
+            String name = "." + absolute.getFileName() + "-building-";
+            return new OutputFolder(absolute, Files.createTempDirectory(absolute.getParent(), name), replaceable);
+        } catch (IOException e) {
+            throw new UsageFault("The output folder " + target + " cannot be written beside: " + e.getMessage()
+                    + ". Name a folder where you may write.");
+        }
+    }
+
+    private static Set<String> replaceable(Path target, boolean overwrite) {
+        if (Files.exists(target) && !Files.isDirectory(target)) {
+            throw new UsageFault("The output folder " + target + " is a file. Name a new or empty folder.");
+        }
+        if (names(target).isEmpty()) {
+            return Set.of();
+        }
+        if (!overwrite) {
+            throw new UsageFault("The output folder " + target
+                    + " is not empty. Name a new or empty folder, or add --overwrite to replace an earlier run's files.");
+        }
+        Path record = target.resolve(RunJson.NAME);
+        if (!Files.isRegularFile(record)) {
+            throw new UsageFault("The output folder " + target + " is not empty and has no " + RunJson.NAME
+                    + ", so no earlier run's files can be told apart. Name a new or empty folder.");
+        }
+        return recorded(record);
+    }
+
+    /** The plain file names that an earlier run's record lists; anything else in it is not ours to touch. */
+    private static Set<String> recorded(Path record) {
+        Set<String> names = new LinkedHashSet<>();
+        names.add(RunJson.NAME);
+        try {
+            JsonNode outputs = JsonFile.read(record, record.toString()).path(RunJson.OUTPUTS);
+            outputs.forEach(output -> {
+                String name = output.path("name").asText();
+                if (name.matches("[A-Za-z0-9_.-]+") && !name.startsWith(".")) {
+                    names.add(name);
+                }
+            });
+        } catch (DataFault e) {
+            throw new UsageFault("The run record in the output folder cannot be read: " + e.getMessage()
+                    + " Name a new or empty folder.");
+        }
+        return names;
+    }
+
+    private static List<String> names(Path folder) {
+        if (!Files.isDirectory(folder)) {
+            return List.of();
+        }
+        try (Stream<Path> files = Files.list(folder)) {
+            return files.map(file -> file.getFileName().toString()).sorted().toList();
+        } catch (IOException e) {
+            throw new UsageFault("The output folder " + folder + " cannot be read: " + e.getMessage());
+        }
+    }
+
+    /** Where a file is to be written while the run lasts. */
+    Path file(String name) {
+        return aside.resolve(name);
+    }
+
+    /** The names of the files written so far. */
+    List<String> written() {
+        return names(aside);
+    }
+
+    /**
+     * Moves the files into place, the run record last, and removes those of an earlier run that have no successor.
+     *
+     * @throws UsageFault if a file that no earlier run wrote is in the way
+     */
+    void publish() {
+        List<String> files = new ArrayList<>(written());
+        files.remove(RunJson.NAME);
+        files.add(RunJson.NAME);
+        for (String name : files) {
+            if (Files.exists(target.resolve(name)) && !replaceable.contains(name)) {
+                throw new UsageFault("The file " + target.resolve(name)
+                        + " is in the way, and no earlier run wrote it. Move it or name another folder.");
+            }
+        }
+        try {
+            Files.createDirectories(target);
+            for (String name : files) {
+                Files.move(file(name), target.resolve(name), StandardCopyOption.REPLACE_EXISTING);
+            }
+            for (String old : replaceable) {
+                if (!files.contains(old)) {
+                    Files.deleteIfExists(target.resolve(old));
+                }
+            }
+        } catch (IOException e) {
+            throw new UsageFault("The files cannot be moved to " + target + ": " + e.getMessage());
+        }
+    }
+
+    @Override
+    public void close() {
+        try {
+            for (String name : written()) {
+                Files.deleteIfExists(file(name));
+            }
+            Files.deleteIfExists(aside);
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+}

@@ -1,0 +1,48 @@
+package org.seepledger.report;
+
+import java.math.BigDecimal;
+import java.math.MathContext;
+import java.util.Locale;
+
+/** Numbers as people read them. */
+public final class Figures {
+
+    private static final double SMALL = 1e-4;
+    private static final double LARGE = 1e12;
+
+    private Figures() {}
+
+    /**
+     * {@return a number to four significant digits, thousands kept apart; a dash where there is none}
+     *
+     * @param value the number
+     */
+    public static String shown(double value) {
+        if (Double.isNaN(value)) {
+            return "-";
+        }
+        if (value == 0) {
+            return "0";
+        }
+        double magnitude = Math.abs(value);
+        if (magnitude < SMALL || magnitude >= LARGE) {
+            return String.format(Locale.ROOT, "%.3e", value);
+        }
+        BigDecimal rounded = new BigDecimal(value).round(new MathContext(4));
+        int decimals = Math.max(0, rounded.scale());
+        return String.format(Locale.ROOT, "%,." + decimals + "f", rounded).replace(',', ' ');
+    }
+
+    /**
+     * {@return a percentage to two decimals, or in powers of ten where that would be 0.00}
+     *
+     * @param value in percent
+     */
+    public static String percent(double value) {
+        if (Double.isNaN(value)) {
+            return "-";
+        }
+        boolean small = value != 0 && Math.abs(value) < 0.005;
+        return String.format(Locale.ROOT, small ? "%.0e %%" : "%.2f %%", value);
+    }
+}

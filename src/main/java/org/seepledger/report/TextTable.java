@@ -1,0 +1,36 @@
+package org.seepledger.report;
+
+import java.util.ArrayList;
+import java.util.List;
+
+/** Columns of plain text: the first flush left, the others flush right. */
+final class TextTable {
+
+    private final List<String[]> rows = new ArrayList<>();
+
+    TextTable row(String... cells) {
+        rows.add(cells);
+        return this;
+    }
+
+    void appendTo(StringBuilder text, String indent) {
+        int[] widths = new int[rows.get(0).length];
+        for (String[] row : rows) {
+            for (int i = 0; i < widths.length; i++) {
+                widths[i] = Math.max(widths[i], row[i].length());
+            }
+        }
+        for (String[] row : rows) {
+            StringBuilder line = new StringBuilder(indent).append(pad(row[0], widths[0], false));
+            for (int i = 1; i < widths.length; i++) {
+                line.append("  ").append(pad(row[i], widths[i], true));
+            }
+            text.append(line.toString().stripTrailing()).append('\n');
+        }
+    }
+
+    private static String pad(String cell, int width, boolean right) {
+        String blanks = " ".repeat(width - cell.length());
+        return right ? blanks + cell : cell + blanks;
+    }
+}
