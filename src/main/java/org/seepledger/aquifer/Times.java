@@ -11,6 +11,7 @@ public final class Times {
     private static final double SECONDS_A_DAY = 86_400;
 
     private final double[] instants;
+    private final Measure unit;
     private final double daysPerUnit;
     private final Optional<LocalDateTime> start;
 
@@ -33,8 +34,16 @@ public final class Times {
             }
         }
         this.instants = instants.clone();
+        this.unit = unit;
         this.daysPerUnit = unit.in(Measure.of("d"));
         this.start = start;
+    }
+
+    /**
+     * {@return the time unit}
+     */
+    public Measure unit() {
+        return unit;
     }
 
     /**
