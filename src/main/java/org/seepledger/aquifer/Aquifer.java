@@ -46,6 +46,17 @@ public record Aquifer(
     }
 
     /**
+     * {@return the surface between layers: an elevation per cell, in length units}
+     *
+     * @param index 0 for the uppermost top, k for the bottom of the k-th layer
+     */
+    public GriddedValues surface(int index) {
+        return index == 0
+                ? layers.get(0).top().orElseThrow()
+                : layers.get(index - 1).bottom();
+    }
+
+    /**
      * {@return the categories of all sources, in order of first mention}
      */
     public List<String> categories() {

@@ -49,4 +49,15 @@ public final class Imbalance {
     public double at(int layer, int row, int column) {
         return layers[layer][window.index(row, column)];
     }
+
+    /**
+     * {@return the imbalances of a row of the window, west to east}
+     *
+     * @param layer the layer, from 0
+     * @param row its row in the grid
+     */
+    public double[] row(int layer, int row) {
+        int from = window.index(row, window.column());
+        return Arrays.copyOfRange(layers[layer], from, from + window.columns());
+    }
 }

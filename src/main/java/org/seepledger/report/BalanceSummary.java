@@ -6,9 +6,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import org.seepledger.aquifer.Aquifer;
-import org.seepledger.aquifer.Grid;
 import org.seepledger.balance.Balance;
-import org.seepledger.balance.HotSpot;
 import org.seepledger.balance.Periods;
 import org.seepledger.balance.Whereabouts;
 import org.seepledger.io.result.PrismBudget;
@@ -99,7 +97,7 @@ public final class BalanceSummary {
         writeTerms(record);
         Whereabouts where = balance.whereabouts().get(prism);
         if (ledger.storageKnown() && isWorthLocating(where, record)) {
-            writeWhereabouts(where);
+            writeWhereabouts(where, record);
         }
     }
 
@@ -174,25 +172,13 @@ public final class BalanceSummary {
         return !where.largest().isEmpty() && where.magnitude() > 1e-9 * throughput;
     }
 
-    private void writeWhereabouts(Whereabouts where) {
+    private void writeWhereabouts(Whereabouts where, PeriodBudget record) {
         text.append("  Where it does not close (cells add up to ");
         text.append(Figures.shown(where.magnitude() * units.rateFactor())).append(' ').append(units.rate());
         text.append(" regardless of sign), the largest cells:\n");
-        Grid grid = aquifer.grid();
-        TextTable table = new TextTable().row("layer", "row", "column", "x", "y", units.rate().toString());
-        for (HotSpot spot : where.largest()) {
-            int fromSouth = grid.flipped(spot.row());
-            double x = grid.x().edge(spot.column()) + 0.5 * grid.x().size(spot.column());
-            double y = grid.y().edge(fromSouth) + 0.5 * grid.y().size(fromSouth);
-            table.row(
-                    String.valueOf(spot.layer() + 1),
-                    String.valueOf(spot.row() + 1),
-                    String.valueOf(spot.column() + 1),
-                    String.format(java.util.Locale.ROOT, "%.1f", grid.mapX(x, y)),
-                    String.format(java.util.Locale.ROOT, "%.1f", grid.mapY(x, y)),
-                    Figures.shown(spot.imbalance() * units.rateFactor()));
-        }
-        table.appendTo(text, "    ");
+        double throughput = record.totals().throughput() / record.period().duration();
+        String unit = units.rate().toString();
+        HotSpots.append(text, aquifer.grid(), where.largest(), unit, units.rateFactor(), throughput);
     }
 
     private String rate(double volume, double time, boolean withUnit) {

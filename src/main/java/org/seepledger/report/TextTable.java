@@ -3,14 +3,20 @@ package org.seepledger.report;
 import java.util.ArrayList;
 import java.util.List;
 
-/** Columns of plain text: the first flush left, the others flush right. */
+/** Columns of plain text: the first flush left, the others flush right; or facts, two columns flush left. */
 final class TextTable {
 
     private final List<String[]> rows = new ArrayList<>();
+    private boolean leftOnly;
 
     TextTable row(String... cells) {
         rows.add(cells);
         return this;
+    }
+
+    void fact(String name, String value) {
+        rows.add(new String[] {name, value});
+        leftOnly = true;
     }
 
     void appendTo(StringBuilder text, String indent) {
@@ -23,7 +29,7 @@ final class TextTable {
         for (String[] row : rows) {
             StringBuilder line = new StringBuilder(indent).append(pad(row[0], widths[0], false));
             for (int i = 1; i < widths.length; i++) {
-                line.append("  ").append(pad(row[i], widths[i], true));
+                line.append("  ").append(pad(row[i], widths[i], !leftOnly));
             }
             text.append(line.toString().stripTrailing()).append('\n');
         }

@@ -1,0 +1,114 @@
+package org.seepledger.job;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.Map;
+import java.util.regex.Pattern;
+import org.seepledger.aquifer.Aquifer;
+import org.seepledger.aquifer.FaceMismatch;
+import org.seepledger.aquifer.StorageKnowledge;
+import org.seepledger.balance.Balance;
+import org.seepledger.balance.RunNotes;
+import org.seepledger.balance.Uncounted;
+import org.seepledger.balance.WellRule;
+import org.seepledger.ledger.Account;
+import org.seepledger.ledger.Entry;
+import org.seepledger.ledger.Group;
+import org.seepledger.ledger.PeriodBudget;
+import org.seepledger.report.Figures;
+
+/** Puts into words what the reader of a balance must know. */
+final class RunWarnings {
+
+    private static final Pattern TAKES_WATER = Pattern.compile(
+            ".*(pump|abstract|extract|withdraw|evapo|transpir|drain).*", Pattern.CASE_INSENSITIVE);
+
+    private final Aquifer aquifer;
+    private final RunNotes notes;
+
+    RunWarnings(Aquifer aquifer, RunNotes notes) {
+        this.aquifer = aquifer;
+        this.notes = notes;
+    }
+
+    /** What may make a number wrong or missing. */
+    List<String> warnings(List<PeriodBudget> records) {
+        List<String> warnings = new ArrayList<>();
+        if (aquifer.storageKnowledge() == StorageKnowledge.UNKNOWN) {
+            warnings.add("Change in storage is not known (heads or storage coefficients are missing): storage, residual and"
+                    + " closure errors are left empty.");
+        }
+        for (RunNotes.ClosedSide side : notes.closedSides()) {
+            warnings.add("\"" + side.item() + "\" of \"" + side.prism() + "\" lies on a closed outer face of the grid: its"
+                    + " flow is left empty and counts as 0 in totals.");
+        }
+        notes.mismatch().ifPresent(mismatch -> warnings.add(differing(mismatch)));
+        notes.uncounted().forEach((item, uncounted) -> addLost(warnings, item, uncounted));
+        records.forEach(record -> addSigns(warnings, record));
+        return warnings.stream().distinct().toList();
+    }
+
+    private String differing(FaceMismatch mismatch) {
+        return String.format(
+                Locale.ROOT,
+                "Two values are given for some faces and differ; the greatest difference is %s at the %s face of layer %d,"
+                        + " row %d, column %d. The east, north and up values are used.",
+                rate(mismatch.difference()),
+                mismatch.face(),
+                mismatch.layer() + 1,
+                mismatch.row() + 1,
+                mismatch.column() + 1);
+    }
+
+    private void addLost(List<String> warnings, String item, Uncounted uncounted) {
+        if (uncounted.lost() > 0) {
+            warnings.add("Of \"" + item + "\", up to " + rate(uncounted.lost())
+                    + " is given where no cell is active, and is not counted.");
+        }
+    }
+
+    private static void addSigns(List<String> warnings, PeriodBudget record) {
+        for (Entry entry : record.entries()) {
+            Account account = entry.account();
+            boolean adds = account.group() == Group.SOURCE && entry.inflow() > 0;
+            if (adds && TAKES_WATER.matcher(account.item()).matches()) {
+                warnings.add("\"" + account.item() + "\" adds water in places, though its name says that it takes water:"
+                        + " check the sign (negative takes water out).");
+            }
+        }
+    }
+
+    /** Lesser remarks. */
+    List<String> remarks(WellRule rule) {
+        List<String> remarks = new ArrayList<>();
+        for (RunNotes.InactiveArea area : notes.inactive()) {
+            remarks.add("In \"" + area.prism() + "\", layer " + (area.layer() + 1) + ", cells over "
+                    + Figures.shown(area.area()) + " " + aquifer.lengthUnit()
+                    + "2 are inactive or without thickness and take no part.");
+        }
+        for (RunNotes.CutWell well : notes.cutWells()) {
+            String counted = rule == WellRule.SPREAD
+                    ? "by the share of its cell inside"
+                    : well.inside() ? "in full" : "not at all";
+            remarks.add("Well \"" + well.well() + "\" stands in a cell that \"" + well.prism() + "\" cuts; it counts "
+                    + counted + ".");
+        }
+        for (Map.Entry<String, Uncounted> source : notes.uncounted().entrySet()) {
+            if (source.getValue().missing() > 0) {
+                remarks.add("\"" + source.getKey() + "\" has no value in up to "
+                        + source.getValue().missing() + " cells of the prisms' window, and adds nothing there.");
+            }
+        }
+        return remarks;
+    }
+
+    /** Doubts that a balance's whole record gives rise to. */
+    static RunWarnings of(Aquifer aquifer, Balance balance) {
+        return new RunWarnings(aquifer, balance.notes());
+    }
+
+    private String rate(double value) {
+        return Figures.shown(value) + " " + aquifer.lengthUnit() + "3/" + aquifer.timeUnit();
+    }
+}
