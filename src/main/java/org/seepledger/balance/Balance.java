@@ -13,7 +13,8 @@ import org.seepledger.prism.PrismCut;
  * @param whereabouts where each prism does not close, in the same order
  * @param notes what the reader of the result must know
  */
-public record Balance(List<Ledger> ledgers, List<PrismCut> cuts, Imbalance imbalance, List<Whereabouts> whereabouts, RunNotes notes) {
+public record Balance(
+        List<Ledger> ledgers, List<PrismCut> cuts, Imbalance imbalance, List<Whereabouts> whereabouts, RunNotes notes) {
 
     /** Copies the lists. */
     public Balance {

@@ -21,8 +21,9 @@ import picocli.CommandLine.Parameters;
 /** {@code seepledger balance}. */
 @Command(
         name = "balance",
-        description = "Strikes the water budget of each prism: what comes in and goes out through each side and lid, what"
-                + " sources add and take, what storage gives and takes, and how well it closes.",
+        description =
+                "Strikes the water budget of each prism: what comes in and goes out through each side and lid, what"
+                        + " sources add and take, what storage gives and takes, and how well it closes.",
         mixinStandardHelpOptions = true,
         sortOptions = false,
         footer = {
@@ -46,7 +47,11 @@ final class BalanceCommand implements Callable<Integer> {
     @Option(names = "--prisms", paramLabel = "F", required = true, description = "The prisms, as GeoJSON.")
     private Path prisms;
 
-    @Option(names = "--out", paramLabel = "DIR", required = true, description = "A new or empty folder for the results.")
+    @Option(
+            names = "--out",
+            paramLabel = "DIR",
+            required = true,
+            description = "A new or empty folder for the results.")
     private Path out;
 
     @ArgGroup
@@ -58,7 +63,8 @@ final class BalanceCommand implements Callable<Integer> {
         @Option(
                 names = "--every",
                 paramLabel = "PERIOD",
-                description = "Strike a budget for each interval (default), month, year, water-year, or the whole record.")
+                description =
+                        "Strike a budget for each interval (default), month, year, water-year, or the whole record.")
         private String every = "interval";
 
         @Option(names = "--periods", paramLabel = "FILE", description = "Or for the periods of a CSV: name,from,to.")
@@ -74,7 +80,10 @@ final class BalanceCommand implements Callable<Integer> {
     @Option(names = "--rate-unit", paramLabel = "UNIT", description = "Unit of rates, as L/s (default: the set's own).")
     private String rateUnit;
 
-    @Option(names = "--volume-unit", paramLabel = "UNIT", description = "Unit of volumes, as ML (default: the set's own).")
+    @Option(
+            names = "--volume-unit",
+            paramLabel = "UNIT",
+            description = "Unit of volumes, as ML (default: the set's own).")
     private String volumeUnit;
 
     @Option(
@@ -92,11 +101,14 @@ final class BalanceCommand implements Callable<Integer> {
     @Option(
             names = "--wells",
             paramLabel = "RULE",
-            description = "How a well counts whose cell a prism cuts: point (default), in full if it is inside; spread, by"
-                    + " the share of its cell inside.")
+            description =
+                    "How a well counts whose cell a prism cuts: point (default), in full if it is inside; spread, by"
+                            + " the share of its cell inside.")
     private String wells = "point";
 
-    @Option(names = "--clip", description = "Cut prisms at the grid's edge instead of refusing those that reach beyond it.")
+    @Option(
+            names = "--clip",
+            description = "Cut prisms at the grid's edge instead of refusing those that reach beyond it.")
     private boolean clip;
 
     @Option(names = "--threads", paramLabel = "N", description = "How many threads may work (default: all processors).")
@@ -166,9 +178,11 @@ final class BalanceCommand implements Callable<Integer> {
                 return choice;
             }
         }
-        String known = String.join(", ", Arrays.stream(choices.getEnumConstants())
-                .map(choice -> choice.name().toLowerCase(Locale.ROOT).replace('_', '-'))
-                .toList());
+        String known = String.join(
+                ", ",
+                Arrays.stream(choices.getEnumConstants())
+                        .map(choice -> choice.name().toLowerCase(Locale.ROOT).replace('_', '-'))
+                        .toList());
         throw new UsageFault(option + " is \"" + text + "\"; give one of " + known + ".");
     }
 
@@ -181,7 +195,8 @@ final class BalanceCommand implements Callable<Integer> {
             if (measure.isCompatible(Measure.of(like))) {
                 return Optional.of(measure);
             }
-            throw new UsageFault(option + " is \"" + text + "\", which measures something else; give a unit as " + like + ".");
+            throw new UsageFault(
+                    option + " is \"" + text + "\", which measures something else; give a unit as " + like + ".");
         } catch (IllegalArgumentException e) {
             throw new UsageFault(option + ": " + e.getMessage() + ".");
         }

@@ -36,7 +36,8 @@ final class Faults {
             return CANCELLED;
         }
         if (fault instanceof OutOfMemoryError) {
-            err.println("The memory that Java may use is full. Give it more with java -Xmx4g, or choose smaller prisms.");
+            err.println(
+                    "The memory that Java may use is full. Give it more with java -Xmx4g, or choose smaller prisms.");
             return PROGRAM;
         }
         err.println("This is a fault of the program, not of the data: " + oneLine(fault)

@@ -10,11 +10,16 @@ import picocli.CommandLine.Parameters;
 /** {@code seepledger inspect}. */
 @Command(
         name = "inspect",
-        description = "Reads everything that an aquifer folder has and prints its grid, layers, times, units and ranges of"
-                + " values, how the set balances in itself, cell by cell, and what looks wrong.",
+        description =
+                "Reads everything that an aquifer folder has and prints its grid, layers, times, units and ranges of"
+                        + " values, how the set balances in itself, cell by cell, and what looks wrong.",
         mixinStandardHelpOptions = true,
         sortOptions = false,
-        footer = {"", "Example: look at the sample before drawing anything.", "  seepledger inspect sample-aquifers/terrace"})
+        footer = {
+            "",
+            "Example: look at the sample before drawing anything.",
+            "  seepledger inspect sample-aquifers/terrace"
+        })
 final class InspectCommand implements Callable<Integer> {
 
     private final Terminal terminal;

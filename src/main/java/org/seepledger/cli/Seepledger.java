@@ -62,7 +62,10 @@ public final class Seepledger {
         Interrupt interrupt = new Interrupt();
         Runtime.getRuntime().addShutdownHook(new Thread(interrupt::stopAndWait, "interrupt"));
         int status = run(
-                new PrintStream(System.out, true, charset), new PrintStream(System.err, true, charset), interrupt, arguments);
+                new PrintStream(System.out, true, charset),
+                new PrintStream(System.err, true, charset),
+                interrupt,
+                arguments);
         interrupt.finished();
         System.exit(status);
     }

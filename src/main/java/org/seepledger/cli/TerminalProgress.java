@@ -45,7 +45,8 @@ final class TerminalProgress implements Progress {
             printed = now;
             long left = (now - began) / done * (steps - done);
             long seconds = Duration.ofNanos(left).toSeconds() + 1;
-            err.println(String.format(Locale.ROOT, "%s: %.0f %%, about %d s left", what, 100.0 * done / steps, seconds));
+            err.println(
+                    String.format(Locale.ROOT, "%s: %.0f %%, about %d s left", what, 100.0 * done / steps, seconds));
         }
     }
 }

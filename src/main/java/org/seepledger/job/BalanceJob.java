@@ -1,13 +1,13 @@
 package org.seepledger.job;
 
 import java.io.IOException;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.Optional;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.balance.Balance;
 import org.seepledger.balance.Periods;
@@ -76,8 +76,7 @@ public final class BalanceJob {
         List<Prism> prisms = prisms(folder);
         List<Period> periods = periods(aquifer);
         stopwatch.lap("reading");
-        Balance balance =
-                WaterBalance.of(aquifer, prisms, request.wells(), request.threads(), progress);
+        Balance balance = WaterBalance.of(aquifer, prisms, request.wells(), request.threads(), progress);
         stopwatch.lap("balancing");
         Period whole = new Periods(aquifer.times()).record();
         List<PeriodBudget> records =
@@ -85,15 +84,16 @@ public final class BalanceJob {
         RunWarnings words = RunWarnings.of(aquifer, balance);
         warnings.addAll(words.warnings(records));
         notes.addAll(words.remarks(request.wells()));
-        List<PrismBudget> budgets =
-                balance.ledgers().stream().map(ledger -> budget(ledger, periods)).toList();
+        List<PrismBudget> budgets = balance.ledgers().stream()
+                .map(ledger -> budget(ledger, periods))
+                .toList();
         Statement statement = new Statement(
                 "Water budget of \"" + aquifer.name() + "\" by seepledger " + Version.text(),
                 inputs(folder),
                 folder.origins(),
                 warnings);
         BudgetCsv.write(out.file("budget.csv"), statement, budgets, aquifer.times(), units);
-        FacesGeoJson.write(out.file("faces.geojson"), folder.crs().name(), prisms, records, units);
+        FacesGeoJson.write(out.file("faces.geojson"), crs(folder), prisms, records, units);
         writeImbalance(folder, balance, out);
         writeRecord(out, statement, balance);
         List<String> files = out.written();
@@ -110,8 +110,8 @@ public final class BalanceJob {
                     request.rateUnit().orElse(null),
                     request.volumeUnit().orElse(null));
         } catch (IllegalArgumentException e) {
-            throw new UsageFault("The unit asked for does not fit: " + e.getMessage()
-                    + ". Give a rate as m3/d and a volume as m3.");
+            throw new UsageFault(
+                    "The unit asked for does not fit: " + e.getMessage() + ". Give a rate as m3/d and a volume as m3.");
         }
     }
 
@@ -153,8 +153,7 @@ public final class BalanceJob {
     private List<Period> periods(Aquifer aquifer) {
         Periods periods = new Periods(aquifer.times());
         return request.periods()
-                .map(file -> periods.named(
-                        PeriodsTable.read(file, file.toString(), aquifer.times(), warnings::add)))
+                .map(file -> periods.named(PeriodsTable.read(file, file.toString(), aquifer.times(), warnings::add)))
                 .orElseGet(() -> periods.every(request.every(), request.waterYearStart()));
     }
 
@@ -176,6 +175,12 @@ public final class BalanceJob {
         return records;
     }
 
+    private static Optional<String> crs(AquiferFolder folder) {
+        return folder.crs().isLocal()
+                ? Optional.empty()
+                : folder.crs().code().or(() -> Optional.of(folder.crs().wkt()));
+    }
+
     private void writeImbalance(AquiferFolder folder, Balance balance, OutputFolder out) throws IOException {
         for (int layer = 0; layer < balance.imbalance().layers(); layer++) {
             int index = layer;
@@ -183,7 +188,7 @@ public final class BalanceJob {
                     out.file("imbalance_l" + (layer + 1) + ".tif"),
                     folder.aquifer().grid(),
                     balance.imbalance().window(),
-                    folder.crs().code(),
+                    crs(folder),
                     row -> balance.imbalance().row(index, row));
         }
     }
@@ -194,9 +199,10 @@ public final class BalanceJob {
             outputs.add(FileRecord.of(name, out.file(name)));
         }
         stopwatch.lap("writing");
-        Map<String, Double> checks = Map.of("largest_difference_between_routes", balance.notes().disagreement());
-        RunJson.Run run = new RunJson.Run(
-                Version.text(), "balance", options(), statement, notes, checks, stopwatch.seconds());
+        Map<String, Double> checks =
+                Map.of("largest_difference_between_routes", balance.notes().disagreement());
+        RunJson.Run run =
+                new RunJson.Run(Version.text(), "balance", options(), statement, notes, checks, stopwatch.seconds());
         RunJson.write(out.file(RunJson.NAME), run, outputs);
     }
 

@@ -62,8 +62,9 @@ final class OutputFolder implements AutoCloseable {
             return Set.of();
         }
         if (!overwrite) {
-            throw new UsageFault("The output folder " + target
-                    + " is not empty. Name a new or empty folder, or add --overwrite to replace an earlier run's files.");
+            throw new UsageFault(
+                    "The output folder " + target
+                            + " is not empty. Name a new or empty folder, or add --overwrite to replace an earlier run's files.");
         }
         Path record = target.resolve(RunJson.NAME);
         if (!Files.isRegularFile(record)) {

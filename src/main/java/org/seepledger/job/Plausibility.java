@@ -14,8 +14,8 @@ import org.seepledger.unit.Measure;
 final class Plausibility {
 
     /** Values that programs commonly write for "no value". */
-    private static final Set<Double> MARKS = Set.of(
-            -999.0, -9999.0, -99999.0, -999.99, -32768.0, 9999.0, 99999.0, 1e20, -1e20, 1e30, -1e30, -888.0);
+    private static final Set<Double> MARKS =
+            Set.of(-999.0, -9999.0, -99999.0, -999.99, -32768.0, 9999.0, 99999.0, 1e20, -1e20, 1e30, -1e30, -888.0);
 
     private static final double BEYOND_ANY_VALUE = 1e19;
 
@@ -70,7 +70,9 @@ final class Plausibility {
 
     private void checkFlux(ValueRange range, Measure unit) {
         boolean flow = range.name().startsWith("flow ");
-        double limit = flow ? FAST_METRES_A_DAY : WET_METRES_A_YEAR * Measure.of("m/yr").in(Measure.of("m/d"));
+        double limit = flow
+                ? FAST_METRES_A_DAY
+                : WET_METRES_A_YEAR * Measure.of("m/yr").in(Measure.of("m/d"));
         if (size(range) * unit.in(Measure.of("m/d")) > limit) {
             String advice = flow
                     ? "specific discharge is seldom so large; check that it is not seepage velocity, and its unit"

@@ -21,8 +21,8 @@ import org.seepledger.report.Figures;
 /** Puts into words what the reader of a balance must know. */
 final class RunWarnings {
 
-    private static final Pattern TAKES_WATER = Pattern.compile(
-            ".*(pump|abstract|extract|withdraw|evapo|transpir|drain).*", Pattern.CASE_INSENSITIVE);
+    private static final Pattern TAKES_WATER =
+            Pattern.compile(".*(pump|abstract|extract|withdraw|evapo|transpir|drain).*", Pattern.CASE_INSENSITIVE);
 
     private final Aquifer aquifer;
     private final RunNotes notes;
@@ -36,12 +36,14 @@ final class RunWarnings {
     List<String> warnings(List<PeriodBudget> records) {
         List<String> warnings = new ArrayList<>();
         if (aquifer.storageKnowledge() == StorageKnowledge.UNKNOWN) {
-            warnings.add("Change in storage is not known (heads or storage coefficients are missing): storage, residual and"
-                    + " closure errors are left empty.");
+            warnings.add(
+                    "Change in storage is not known (heads or storage coefficients are missing): storage, residual and"
+                            + " closure errors are left empty.");
         }
         for (RunNotes.ClosedSide side : notes.closedSides()) {
-            warnings.add("\"" + side.item() + "\" of \"" + side.prism() + "\" lies on a closed outer face of the grid: its"
-                    + " flow is left empty and counts as 0 in totals.");
+            warnings.add(
+                    "\"" + side.item() + "\" of \"" + side.prism() + "\" lies on a closed outer face of the grid: its"
+                            + " flow is left empty and counts as 0 in totals.");
         }
         notes.mismatch().ifPresent(mismatch -> warnings.add(differing(mismatch)));
         notes.uncounted().forEach((item, uncounted) -> addLost(warnings, item, uncounted));
@@ -73,8 +75,9 @@ final class RunWarnings {
             Account account = entry.account();
             boolean adds = account.group() == Group.SOURCE && entry.inflow() > 0;
             if (adds && TAKES_WATER.matcher(account.item()).matches()) {
-                warnings.add("\"" + account.item() + "\" adds water in places, though its name says that it takes water:"
-                        + " check the sign (negative takes water out).");
+                warnings.add(
+                        "\"" + account.item() + "\" adds water in places, though its name says that it takes water:"
+                                + " check the sign (negative takes water out).");
             }
         }
     }

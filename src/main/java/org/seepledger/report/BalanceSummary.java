@@ -58,11 +58,7 @@ public final class BalanceSummary {
      * @param warnings what the reader must know
      */
     public static String of(
-            Aquifer aquifer,
-            Balance balance,
-            List<PrismBudget> budgets,
-            ResultUnits units,
-            List<String> warnings) {
+            Aquifer aquifer, Balance balance, List<PrismBudget> budgets, ResultUnits units, List<String> warnings) {
         return new BalanceSummary(aquifer, balance, budgets, units).write(warnings);
     }
 
@@ -70,7 +66,10 @@ public final class BalanceSummary {
         int intervals = aquifer.times().intervals();
         int prisms = balance.ledgers().size();
         text.append("Water budget of \"").append(aquifer.name()).append("\": ");
-        text.append(counted(prisms, "prism")).append(", ").append(counted(intervals, "interval")).append(", time ");
+        text.append(counted(prisms, "prism"))
+                .append(", ")
+                .append(counted(intervals, "interval"))
+                .append(", time ");
         text.append(Figures.shown(aquifer.times().instant(0))).append(" to ");
         text.append(Figures.shown(aquifer.times().instant(intervals))).append(' ');
         text.append(aquifer.timeUnit()).append(". Rates are means over the record.\n");
@@ -106,19 +105,23 @@ public final class BalanceSummary {
         double time = record.period().duration();
         if (Double.isNaN(totals.storageChange())) {
             double unexplained = totals.inflow() - totals.outflow();
-            text.append("  Closure cannot be judged: change in storage is not known. Inflow less outflow, storage included,"
-                            + " is ")
+            text.append(
+                            "  Closure cannot be judged: change in storage is not known. Inflow less outflow, storage included,"
+                                    + " is ")
                     .append(rate(unexplained, time, true))
                     .append(".\n");
             return;
         }
         text.append("  Closure error ").append(Figures.percent(totals.closureError()));
-        text.append(" of throughput (").append(Figures.percent(totals.netClosureError())).append(" of net flow): ");
+        text.append(" of throughput (")
+                .append(Figures.percent(totals.netClosureError()))
+                .append(" of net flow): ");
         text.append(rate(totals.residual(), time, true)).append(" of ");
         text.append(rate(totals.throughput(), time, true)).append(" is unexplained.\n");
         if (periods.periods().size() > 1) {
             periods.periods().stream()
-                    .max(Comparator.comparingDouble(budget -> size(budget.totals().closureError())))
+                    .max(Comparator.comparingDouble(
+                            budget -> size(budget.totals().closureError())))
                     .ifPresent(worst -> text.append("  Worst period: ")
                             .append(worst.period().name())
                             .append(", ")
@@ -136,7 +139,9 @@ public final class BalanceSummary {
         for (Entry entry : record.entries()) {
             if (entry.account().quantified()) {
                 Group group = entry.account().group();
-                String item = group == Group.LID ? entry.account().item() + " lid" : entry.account().item();
+                String item = group == Group.LID
+                        ? entry.account().item() + " lid"
+                        : entry.account().item();
                 terms.merge(group + item, new Term(item, entry.inflow(), entry.outflow()), Term::plus);
             }
         }
@@ -154,8 +159,7 @@ public final class BalanceSummary {
                     Figures.percent(throughput == 0 ? Double.NaN : 100 * Math.abs(term.net()) / throughput));
         }
         if (sorted.size() > TERMS_SHOWN) {
-            Term rest = sorted.subList(TERMS_SHOWN, sorted.size()).stream()
-                    .reduce(new Term("", 0, 0), Term::plus);
+            Term rest = sorted.subList(TERMS_SHOWN, sorted.size()).stream().reduce(new Term("", 0, 0), Term::plus);
             table.row(
                     counted(sorted.size() - TERMS_SHOWN, "smaller term"),
                     rate(rest.inflow(), time, false),
@@ -174,7 +178,9 @@ public final class BalanceSummary {
 
     private void writeWhereabouts(Whereabouts where, PeriodBudget record) {
         text.append("  Where it does not close (cells add up to ");
-        text.append(Figures.shown(where.magnitude() * units.rateFactor())).append(' ').append(units.rate());
+        text.append(Figures.shown(where.magnitude() * units.rateFactor()))
+                .append(' ')
+                .append(units.rate());
         text.append(" regardless of sign), the largest cells:\n");
         double throughput = record.totals().throughput() / record.period().duration();
         String unit = units.rate().toString();

@@ -10,7 +10,8 @@ final class HotSpots {
 
     private HotSpots() {}
 
-    static void append(StringBuilder text, Grid grid, List<HotSpot> spots, String unit, double factor, double throughput) {
+    static void append(
+            StringBuilder text, Grid grid, List<HotSpot> spots, String unit, double factor, double throughput) {
         TextTable table = new TextTable().row("layer", "row", "column", "x", "y", unit, "of throughput");
         for (HotSpot spot : spots) {
             int fromSouth = grid.flipped(spot.row());

@@ -66,25 +66,38 @@ public final class InspectionText {
     private void writeFrame() {
         Grid grid = aquifer.grid();
         TextTable facts = new TextTable();
-        facts.fact("plan", folder.crs().isLocal()
-                ? "local coordinates in " + aquifer.lengthUnit()
-                : folder.crs().code().orElse("a system given as WKT") + ", " + Figures.shown(grid.planUnit()) + " "
-                        + aquifer.lengthUnit() + " a plan unit");
-        facts.fact("heights", aquifer.lengthUnit()
-                + (folder.verticalDatum().isEmpty() ? "" : ", vertical datum " + folder.verticalDatum()));
-        facts.fact("grid", grid.columns() + " columns of " + sizes(grid.x()) + ", " + grid.rows() + " rows of "
-                + sizes(grid.y()) + (grid.rotation() == 0 ? "" : ", turned " + Figures.shown(grid.rotation()) + " degrees"));
+        facts.fact(
+                "plan",
+                folder.crs().isLocal()
+                        ? "local coordinates in " + aquifer.lengthUnit()
+                        : folder.crs().code().orElse("a system given as WKT") + ", " + Figures.shown(grid.planUnit())
+                                + " " + aquifer.lengthUnit() + " a plan unit");
+        facts.fact(
+                "heights",
+                aquifer.lengthUnit()
+                        + (folder.verticalDatum().isEmpty() ? "" : ", vertical datum " + folder.verticalDatum()));
+        facts.fact(
+                "grid",
+                grid.columns() + " columns of " + sizes(grid.x()) + ", " + grid.rows() + " rows of " + sizes(grid.y())
+                        + (grid.rotation() == 0 ? "" : ", turned " + Figures.shown(grid.rotation()) + " degrees"));
         facts.fact("times", times());
-        facts.fact("flow", aquifer.flow() instanceof DarcyFlux
-                ? "specific discharge at cell centres"
-                : "volumetric flow through cell faces");
-        facts.fact("heads", aquifer.head().map(head -> head.changes() ? "at each instant" : "one for all instants")
-                .orElse("none"));
-        facts.fact("storage", switch (aquifer.storageKnowledge()) {
-            case STEADY -> "none: nothing changes";
-            case KNOWN -> "known";
-            case UNKNOWN -> "not known";
-        });
+        facts.fact(
+                "flow",
+                aquifer.flow() instanceof DarcyFlux
+                        ? "specific discharge at cell centres"
+                        : "volumetric flow through cell faces");
+        facts.fact(
+                "heads",
+                aquifer.head()
+                        .map(head -> head.changes() ? "at each instant" : "one for all instants")
+                        .orElse("none"));
+        facts.fact(
+                "storage",
+                switch (aquifer.storageKnowledge()) {
+                    case STEADY -> "none: nothing changes";
+                    case KNOWN -> "known";
+                    case UNKNOWN -> "not known";
+                });
         facts.fact("sources", aquifer.categories().isEmpty() ? "none" : String.join(", ", aquifer.categories()));
         facts.appendTo(text, "  ");
     }
@@ -95,7 +108,8 @@ public final class InspectionText {
         double last = aquifer.times().instant(intervals);
         String span = intervals + (intervals == 1 ? " interval, " : " intervals, ") + Figures.shown(first) + " to "
                 + Figures.shown(last) + " " + aquifer.timeUnit();
-        return aquifer.times().date(first)
+        return aquifer.times()
+                .date(first)
                 .map(date -> span + ", " + date.toLocalDate() + " to "
                         + aquifer.times().date(last).orElseThrow().toLocalDate())
                 .orElse(span);
@@ -143,10 +157,14 @@ public final class InspectionText {
         text.append("\nHow the set balances in itself, mean over the record\n");
         TextTable facts = new TextTable();
         facts.fact("throughput", Figures.shown(throughput) + " " + rateUnit);
-        facts.fact("residual", Figures.shown(totals.residual() / time) + " " + rateUnit + ", "
-                + Figures.percent(totals.closureError()) + " of throughput");
-        facts.fact("cell imbalance", Figures.shown(where.magnitude()) + " " + rateUnit + " regardless of sign, "
-                + Figures.percent(100 * where.magnitude() / throughput) + " of throughput");
+        facts.fact(
+                "residual",
+                Figures.shown(totals.residual() / time) + " " + rateUnit + ", " + Figures.percent(totals.closureError())
+                        + " of throughput");
+        facts.fact(
+                "cell imbalance",
+                Figures.shown(where.magnitude()) + " " + rateUnit + " regardless of sign, "
+                        + Figures.percent(100 * where.magnitude() / throughput) + " of throughput");
         facts.appendTo(text, "  ");
         if (Double.isNaN(totals.storageChange())) {
             text.append("  Change in storage is not known: cell imbalance includes it.\n");

@@ -81,9 +81,8 @@ public final class AquiferReader {
     private AquiferFolder read(Path file) {
         length = measure("length_unit", "m");
         time = measure("time_unit", "d");
-        PlanCrs crs = root.path("crs").isTextual()
-                ? PlanCrs.of(root.get("crs").textValue(), FILE, "crs")
-                : PlanCrs.local();
+        PlanCrs crs =
+                root.path("crs").isTextual() ? PlanCrs.of(root.get("crs").textValue(), FILE, "crs") : PlanCrs.local();
         Grid grid = GridReader.read(root.get("grid"), crs.planUnit(length), files);
         JsonNode layerNodes = root.get("layers");
         Frame frame = new Frame(grid, layerNodes.size(), times());
@@ -96,8 +95,7 @@ public final class AquiferReader {
         Storage storage = storage(root.path("storage"), bindings);
         List<Source> sources = new SourcesReader(bindings, length, time, warnings).read(root.path("sources"));
         String name = root.has("name") ? root.get("name").textValue() : folderName;
-        Aquifer aquifer =
-                new Aquifer(name, grid, layers, frame.times(), flow, head, storage, sources, length, time);
+        Aquifer aquifer = new Aquifer(name, grid, layers, frame.times(), flow, head, storage, sources, length, time);
         warnOfChoices(aquifer);
         files.shapeNote().ifPresent(notes::add);
         Map<String, Path> inputs = new LinkedHashMap<>();
@@ -152,7 +150,11 @@ public final class AquiferReader {
             String place = "layers[" + i + "]";
             if (i == 0 && !node.has("top")) {
                 throw new DataFault(
-                        FILE, place, "no \"top\"", "the top of the uppermost layer", "Add it; the others may go without.");
+                        FILE,
+                        place,
+                        "no \"top\"",
+                        "the top of the uppermost layer",
+                        "Add it; the others may go without.");
             }
             String name = node.has("name") ? node.get("name").textValue() : "layer " + (i + 1);
             layers.add(new Layer(
@@ -190,7 +192,8 @@ public final class AquiferReader {
 
     private static Optional<GriddedValues> coefficient(JsonNode node, String key, Bindings bindings, Measure unit) {
         return node.has(key)
-                ? Optional.of(bindings.values(key.replace('_', ' '), node.get(key), "storage." + key, unit, StepKind.NONE))
+                ? Optional.of(
+                        bindings.values(key.replace('_', ' '), node.get(key), "storage." + key, unit, StepKind.NONE))
                 : Optional.empty();
     }
 
@@ -204,8 +207,9 @@ public final class AquiferReader {
         if (aquifer.flow() instanceof DarcyFlux flux) {
             boolean areal = aquifer.sources().stream().anyMatch(Source.Areal.class::isInstance);
             if (flux.outerFaces().top() && areal) {
-                warnings.add("The top is open to the given flux and there are areal sources too: recharge may be counted"
-                        + " twice.");
+                warnings.add(
+                        "The top is open to the given flux and there are areal sources too: recharge may be counted"
+                                + " twice.");
             }
             if (aquifer.head().isEmpty() && aquifer.layers().stream().anyMatch(Layer::waterTable)) {
                 warnings.add("No heads are given: the full thickness of water-table layers is taken as saturated, which"

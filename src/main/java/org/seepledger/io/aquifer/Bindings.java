@@ -44,8 +44,7 @@ final class Bindings {
         return values(name, node, place, unit, steps, Repeats.REFUSED);
     }
 
-    GriddedValues values(
-            String name, JsonNode node, String place, Measure unit, StepKind steps, Repeats repeats) {
+    GriddedValues values(String name, JsonNode node, String place, Measure unit, StepKind steps, Repeats repeats) {
         GriddedValues values = new Binding(place, unit, steps, repeats).read(node);
         quantities.add(new Quantity(name, unit, steps, values));
         return values;

@@ -59,7 +59,7 @@ public final class DataFiles implements AutoCloseable {
     int matchedBands(String name, String place, Grid grid) {
         path(name, place);
         try (GeoTiff raster = raster(name)) {
-            Optional<String> note = GridMatch.check(raster, name, grid);
+            Optional<String> note = GridMatch.check(raster, grid);
             matchedByShape += note.isPresent() ? 1 : 0;
             shapeNote = shapeNote.or(() -> note);
             return raster.bands();
@@ -70,8 +70,7 @@ public final class DataFiles implements AutoCloseable {
 
     GriddedTable table(String name, String place, Frame frame, Repeats repeats) {
         Path path = path(name, place);
-        return tables.computeIfAbsent(
-                name + "/" + repeats, key -> GriddedTable.open(path, name, frame, repeats));
+        return tables.computeIfAbsent(name + "/" + repeats, key -> GriddedTable.open(path, name, frame, repeats));
     }
 
     /** A note where rasters were matched by their shape alone. */

@@ -38,19 +38,21 @@ final class FlowReader {
 
     Flow read() {
         if (snapshots) {
-            warnings.add("Flow is given as snapshots at instants; each interval takes the mean of its two ends, which is not"
-                    + " the interval's own mean.");
+            warnings.add(
+                    "Flow is given as snapshots at instants; each interval takes the mean of its two ends, which is not"
+                            + " the interval's own mean.");
         }
         String kind = node.get("kind").textValue();
         return switch (kind) {
             case "darcy_flux" -> darcyFlux();
             case "face_flow" -> faceFlow();
-            default -> throw new DataFault(
-                    AquiferReader.FILE,
-                    "flow.kind",
-                    "\"" + kind + "\", which this version does not compute yet",
-                    "\"darcy_flux\" or \"face_flow\"",
-                    "Give the specific discharge or the face flows that the heads lead to.");
+            default ->
+                throw new DataFault(
+                        AquiferReader.FILE,
+                        "flow.kind",
+                        "\"" + kind + "\", which this version does not compute yet",
+                        "\"darcy_flux\" or \"face_flow\"",
+                        "Give the specific discharge or the face flows that the heads lead to.");
         };
     }
 
@@ -84,7 +86,8 @@ final class FlowReader {
                 throw new DataFault(
                         AquiferReader.FILE,
                         "flow",
-                        "\"" + key + "\" with a flow of kind \"" + node.get("kind").textValue() + "\"",
+                        "\"" + key + "\" with a flow of kind \""
+                                + node.get("kind").textValue() + "\"",
                         "only " + known,
                         "Take it out, or correct the kind.");
             }

@@ -14,8 +14,7 @@ import org.seepledger.io.raster.GeoTiff;
  * @param band which band holds what
  * @param conversion from stored values to the set's units
  */
-record RasterValues(DataFiles files, String name, BandRule band, Conversion conversion)
-        implements GriddedValues {
+record RasterValues(DataFiles files, String name, BandRule band, Conversion conversion) implements GriddedValues {
 
     @Override
     public void read(int layer, int step, Window window, double[] target, int offset) {

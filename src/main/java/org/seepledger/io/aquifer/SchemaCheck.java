@@ -26,7 +26,8 @@ final class SchemaCheck {
 
     private static JsonSchema load() {
         try (InputStream schema = SchemaCheck.class.getResourceAsStream(RESOURCE)) {
-            return JsonSchemaFactory.getInstance(SpecVersion.VersionFlag.V202012).getSchema(schema);
+            return JsonSchemaFactory.getInstance(SpecVersion.VersionFlag.V202012)
+                    .getSchema(schema);
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }
@@ -40,11 +41,9 @@ final class SchemaCheck {
      */
     static void check(JsonNode root) {
         Set<ValidationMessage> messages = SCHEMA.validate(root);
-        messages.stream()
-                .min(Comparator.comparingInt(SchemaCheck::rank))
-                .ifPresent(message -> {
-                    throw fault(message);
-                });
+        messages.stream().min(Comparator.comparingInt(SchemaCheck::rank)).ifPresent(message -> {
+            throw fault(message);
+        });
     }
 
     private static int rank(ValidationMessage message) {
@@ -60,18 +59,20 @@ final class SchemaCheck {
         String place = place(message);
         return switch (message.getType()) {
             case "additionalProperties" -> unknownKey(message, place);
-            case "required" -> new DataFault(
-                    AquiferReader.FILE,
-                    place,
-                    "no \"" + message.getProperty() + "\"",
-                    "one",
-                    "Add the key; docs/formats.md says what it means.");
-            default -> new DataFault(
-                    AquiferReader.FILE,
-                    place,
-                    shown(message.getInstanceNode()),
-                    expected(message),
-                    "Correct it; docs/formats.md says what may stand there.");
+            case "required" ->
+                new DataFault(
+                        AquiferReader.FILE,
+                        place,
+                        "no \"" + message.getProperty() + "\"",
+                        "one",
+                        "Add the key; docs/formats.md says what it means.");
+            default ->
+                new DataFault(
+                        AquiferReader.FILE,
+                        place,
+                        shown(message.getInstanceNode()),
+                        expected(message),
+                        "Correct it; docs/formats.md says what may stand there.");
         };
     }
 
@@ -87,8 +88,7 @@ final class SchemaCheck {
         String remedy = NearestName.of(key, known)
                 .map(name -> "Did you mean \"" + name + "\"?")
                 .orElse("Take it out.");
-        return new DataFault(
-                AquiferReader.FILE, place, "the unknown key \"" + key + "\"", "one of " + known, remedy);
+        return new DataFault(AquiferReader.FILE, place, "the unknown key \"" + key + "\"", "one of " + known, remedy);
     }
 
     /** The keys that the schema knows beside the unknown one. */
@@ -97,7 +97,8 @@ final class SchemaCheck {
         for (String step : steps(message)) {
             schema = schema.path(step);
             while (schema.has("$ref")) {
-                schema = SCHEMA.getSchemaNode().at(schema.get("$ref").textValue().substring(1));
+                schema =
+                        SCHEMA.getSchemaNode().at(schema.get("$ref").textValue().substring(1));
             }
         }
         return schema.get("properties");
@@ -117,7 +118,10 @@ final class SchemaCheck {
     }
 
     private static String place(ValidationMessage message) {
-        return message.getInstanceLocation().toString().replaceFirst("^\\$\\.?", "").replaceFirst("^/", "");
+        return message.getInstanceLocation()
+                .toString()
+                .replaceFirst("^\\$\\.?", "")
+                .replaceFirst("^/", "");
     }
 
     private static String expected(ValidationMessage message) {

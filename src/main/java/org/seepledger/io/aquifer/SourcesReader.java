@@ -37,14 +37,16 @@ final class SourcesReader {
         String category = node.get("category").textValue();
         Measure rate = Measure.power(length, 3).per(time);
         return switch (node.get("kind").textValue()) {
-            case "areal" -> new Source.Areal(
-                    category,
-                    bindings.values(
-                            category, node.get("rate"), place + ".rate", length.per(time), StepKind.INTERVAL));
-            case "cells" -> new Source.Cells(
-                    category,
-                    bindings.values(
-                            category, node.get("rate"), place + ".rate", rate, StepKind.INTERVAL, Repeats.ADDED));
+            case "areal" ->
+                new Source.Areal(
+                        category,
+                        bindings.values(
+                                category, node.get("rate"), place + ".rate", length.per(time), StepKind.INTERVAL));
+            case "cells" ->
+                new Source.Cells(
+                        category,
+                        bindings.values(
+                                category, node.get("rate"), place + ".rate", rate, StepKind.INTERVAL, Repeats.ADDED));
             default -> points(category, node.get("file").textValue(), place, rate);
         };
     }

@@ -21,8 +21,23 @@ import org.seepledger.ledger.Totals;
 public final class BudgetCsv {
 
     private static final String[] HEADER = {
-        "prism", "period", "from", "to", "from_date", "to_date", "group", "item", "layer", "inflow_rate", "outflow_rate",
-        "net_rate", "inflow_volume", "outflow_volume", "net_volume", "rate_unit", "volume_unit"
+        "prism",
+        "period",
+        "from",
+        "to",
+        "from_date",
+        "to_date",
+        "group",
+        "item",
+        "layer",
+        "inflow_rate",
+        "outflow_rate",
+        "net_rate",
+        "inflow_volume",
+        "outflow_volume",
+        "net_volume",
+        "rate_unit",
+        "volume_unit"
     };
     private static final String ALL_LAYERS = "*";
     private static final String NONE = "";
@@ -47,15 +62,14 @@ public final class BudgetCsv {
      * @param units the units to give
      * @throws IOException if it cannot be written
      */
-    public static void write(
-            Path file, Statement statement, List<PrismBudget> budgets, Times times, ResultUnits units)
+    public static void write(Path file, Statement statement, List<PrismBudget> budgets, Times times, ResultUnits units)
             throws IOException {
-        CSVFormat format = CSVFormat.RFC4180.builder().setHeader().get();
+
         try (Writer text = Files.newBufferedWriter(file)) {
             for (String line : statement.lines()) {
                 text.write("# " + line + "\r\n");
             }
-            CSVPrinter printer = new CSVPrinter(text, format);
+            CSVPrinter printer = new CSVPrinter(text, CSVFormat.RFC4180);
             printer.printRecord((Object[]) HEADER);
             BudgetCsv table = new BudgetCsv(times, units, printer);
             for (PrismBudget prism : budgets) {

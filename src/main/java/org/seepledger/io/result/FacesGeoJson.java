@@ -35,7 +35,7 @@ public final class FacesGeoJson {
      * Writes the faces.
      *
      * @param file the file
-     * @param crs the name of the coordinate system; empty for local coordinates
+     * @param crs the coordinate system as {@code EPSG:n} or WKT; empty for local coordinates
      * @param prisms the prisms
      * @param records the budget of the record for each of them
      * @param units the units to give
@@ -67,7 +67,7 @@ public final class FacesGeoJson {
         json.writeObjectFieldStart("crs");
         json.writeStringField("type", "name");
         json.writeObjectFieldStart("properties");
-        json.writeStringField("name", name);
+        json.writeStringField("name", name.replaceFirst("^EPSG:", "urn:ogc:def:crs:EPSG::"));
         json.writeEndObject();
         json.writeEndObject();
     }

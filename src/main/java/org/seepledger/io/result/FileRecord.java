@@ -27,7 +27,7 @@ public record FileRecord(String name, long bytes, String sha256) {
      * @throws IOException if it cannot be read
      */
     public static FileRecord of(String name, Path file) throws IOException {
-        MessageDigest digest = sha256();
+        MessageDigest digest = newDigest();
         long bytes = 0;
         try (InputStream in = Files.newInputStream(file)) {
             byte[] chunk = new byte[CHUNK];
@@ -39,7 +39,7 @@ public record FileRecord(String name, long bytes, String sha256) {
         return new FileRecord(name, bytes, HexFormat.of().formatHex(digest.digest()));
     }
 
-    private static MessageDigest sha256() {
+    private static MessageDigest newDigest() {
         try {
             return MessageDigest.getInstance("SHA-256");
         } catch (NoSuchAlgorithmException e) {
