@@ -1,0 +1,123 @@
+package org.seepledger.io.prisms;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.function.Consumer;
+import org.seepledger.aquifer.Grid;
+import org.seepledger.fault.DataFault;
+import org.seepledger.io.DataFolder;
+import org.seepledger.io.JsonFile;
+import org.seepledger.io.crs.PlanCrs;
+import org.seepledger.prism.GridEdge;
+import org.seepledger.prism.Prism;
+
+/**
+ * Reads prisms from a GeoJSON file.
+ *
+ * @param crs the aquifer's plan coordinates
+ * @param grid its grid
+ * @param layers how many layers it has
+ * @param clip whether prisms that reach beyond the grid are cut at its edge; else they are refused
+ * @param surfaces reads the rasters that stand for a top or bottom
+ * @param notes told what a user should know, a line each
+ */
+public record PrismsReader(
+        PlanCrs crs, Grid grid, int layers, boolean clip, SurfaceReader surfaces, Consumer<String> notes) {
+
+    /**
+     * {@return the prisms of a file, in its order}
+     *
+     * @param file a FeatureCollection of Polygons and MultiPolygons, or one Feature
+     * @param shownFile the file as the user named it, for messages
+     * @throws DataFault if anything in it is wrong, with the feature and key or coordinates
+     */
+    public List<Prism> read(Path file, String shownFile) {
+        JsonNode root = JsonFile.read(file, shownFile);
+        Spot whole = new Spot(shownFile, "");
+        List<JsonNode> features = features(root, whole);
+        FileCrs fileCrs = new FileCrs(crs, notes);
+        DataFolder folder = DataFolder.holding(file, shownFile);
+        FeatureReader reader = new FeatureReader(
+                new RingsReader(fileCrs.transform(root, whole), fileCrs.remedyForDegrees()),
+                new VerticalRangeReader(layers, folder, surfaces),
+                new OwnKeys(notes));
+        GridEdge edge = GridEdge.of(grid);
+        List<Prism> prisms = new ArrayList<>();
+        for (JsonNode feature : features) {
+            int number = prisms.size() + 1;
+            Prism prism = reader.read(feature, number, shownFile);
+            prisms.add(within(edge, prism, new Spot(shownFile, "feature " + number + " " + Spot.quoted(prism.name()))));
+        }
+        return prisms;
+    }
+
+    private static List<JsonNode> features(JsonNode root, Spot spot) {
+        String type = root.path("type").asText();
+        if (type.equals("Feature")) {
+            return List.of(root);
+        }
+        JsonNode features = root.path("features");
+        if (!type.equals("FeatureCollection") || !features.isArray()) {
+            throw spot.fault(
+                    root.isObject() ? "a GeoJSON object of type " + Spot.shown(root.path("type")) : Spot.shown(root),
+                    "a FeatureCollection of Polygons or MultiPolygons",
+                    "Wrap the polygons in features, each with a property \"name\".");
+        }
+        if (features.isEmpty()) {
+            throw spot.fault("no features", "at least one polygon", "Draw a prism.");
+        }
+        List<JsonNode> all = new ArrayList<>();
+        for (JsonNode feature : features) {
+            all.add(feature);
+            if (feature.has("crs")) {
+                throw spot.in("feature " + all.size())
+                        .fault("a crs of its own", "one crs for the whole file", "Move it to the top of the file.");
+            }
+        }
+        return all;
+    }
+
+    private Prism within(GridEdge edge, Prism prism, Spot spot) {
+        if (edge.holds(prism)) {
+            return prism;
+        }
+        Prism left = clipped(edge, prism, spot);
+        String share = String.format(Locale.ROOT, "%.3g %%", 100 * edge.shareOutside(prism, left));
+        if (left.rings().isEmpty()) {
+            throw spot.fault(
+                    "a polygon that lies outside the grid",
+                    "a polygon on the grid, which has " + extent(),
+                    "Check the coordinates and the CRS of both.");
+        }
+        if (!clip) {
+            throw spot.fault(
+                    "a polygon with " + share + " of its area outside the grid",
+                    "a polygon within the grid, which has " + extent(),
+                    "Draw it within the grid, or cut it at the grid's edge with --clip.");
+        }
+        notes.accept(
+                spot + ": " + share + " of its area lies outside the grid; the polygon was cut at the grid's edge");
+        return left;
+    }
+
+    private static Prism clipped(GridEdge edge, Prism prism, Spot spot) {
+        try {
+            return edge.clip(prism);
+        } catch (IllegalArgumentException e) {
+            throw spot.fault(
+                    e.getMessage() + " where the polygon leaves the grid",
+                    "sides that cross the grid's edge apart from each other",
+                    "Simplify the polygon there.");
+        }
+    }
+
+    private String extent() {
+        double width = grid.x().edge(grid.columns());
+        double height = grid.y().edge(grid.rows());
+        return "corners at " + Spot.point(grid.mapX(0, 0), grid.mapY(0, 0)) + " and "
+                + Spot.point(grid.mapX(width, height), grid.mapY(width, height));
+    }
+}
