@@ -108,8 +108,6 @@ public record Aquifer(
 
     /**
      * {@return the wells of all point sources, each in its cell}
-     *
-     * @throws org.seepledger.fault.DataFault if one lies outside the grid
      */
     public List<PlacedWell> placedWells() {
         return sources.stream()

@@ -116,11 +116,14 @@ public final class Axis {
     }
 
     /**
-     * {@return a place, put on an edge where it lies within {@value #SNAP} of a cell of one}
+     * {@return a place, put on an edge where it lies within {@value #SNAP} of a cell of one, or beyond the axis}
      *
-     * @param distance from the first edge, in plan units
+     * @param distance from the first edge, in plan units; beyond the axis by no more than rounding
      */
     public double snapped(double distance) {
+        if (distance < 0 || distance > edges[count()]) {
+            return distance < 0 ? 0 : edges[count()];
+        }
         int cell = Math.max(0, Math.min(count() - 1, cellAt(distance)));
         for (int line = cell; line <= cell + 1; line++) {
             if (Math.abs(distance - edges[line]) <= SNAP * size(cell)) {
@@ -128,5 +131,16 @@ public final class Axis {
             }
         }
         return distance;
+    }
+
+    /**
+     * {@return whether a place lies on the axis, its ends included, to {@value #SNAP} of a cell}
+     *
+     * @param distance from the first edge, in plan units
+     * @param rounding by how much more it may lie beyond
+     */
+    boolean holds(double distance, double rounding) {
+        return distance >= -Math.max(rounding, SNAP * size(0))
+                && distance <= edges[count()] + Math.max(rounding, SNAP * size(count() - 1));
     }
 }

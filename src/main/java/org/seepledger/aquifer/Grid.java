@@ -15,6 +15,9 @@ package org.seepledger.aquifer;
  */
 public record Grid(Axis x, Axis y, double rotation, double planUnit) {
 
+    /** By how many steps of the number format turning a map coordinate may be off. */
+    private static final int ROUNDING = 4;
+
     /**
      * {@return the number of columns}
      */
@@ -105,6 +108,18 @@ public record Grid(Axis x, Axis y, double rotation, double planUnit) {
      */
     public double mapY(double localX, double localY) {
         return y.origin() + localX * sine() + localY * cosine();
+    }
+
+    /**
+     * {@return whether a place lies on the grid, its edges included, to a billionth of a cell and the rounding of map
+     * coordinates}
+     *
+     * @param mapX its map x
+     * @param mapY its map y
+     */
+    public boolean holds(double mapX, double mapY) {
+        double rounding = ROUNDING * Math.ulp(Math.max(Math.abs(mapX), Math.abs(mapY)));
+        return x.holds(localX(mapX, mapY), rounding) && y.holds(localY(mapX, mapY), rounding);
     }
 
     /**

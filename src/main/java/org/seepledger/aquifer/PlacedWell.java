@@ -22,23 +22,14 @@ public record PlacedWell(Well well, int row, int column, double across, double u
     /**
      * {@return a well in its cell}
      *
-     * @param well the well
+     * @param well a well on the grid
      * @param grid the grid
-     * @throws DataFault if it lies outside the grid
      */
     public static PlacedWell of(Well well, Grid grid) {
         double x = grid.x().snapped(grid.localX(well.x(), well.y()));
         double y = grid.y().snapped(grid.localY(well.x(), well.y()));
         int column = grid.x().cellAt(x);
         int fromSouth = grid.y().cellAt(y);
-        if (column < 0 || column >= grid.columns() || fromSouth < 0 || fromSouth >= grid.rows()) {
-            throw new DataFault(
-                    well.schedule().get(0).place(),
-                    "well \"" + well.name() + "\"",
-                    "the place " + well.x() + ", " + well.y() + " outside the grid",
-                    "a place inside the grid",
-                    "Correct the coordinates, or leave the well out.");
-        }
         return new PlacedWell(
                 well,
                 grid.flipped(fromSouth),

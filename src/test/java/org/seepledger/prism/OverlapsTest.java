@@ -111,6 +111,11 @@ class OverlapsTest {
             public boolean changes() {
                 return false;
             }
+
+            @Override
+            public boolean layered() {
+                return false;
+            }
         };
         return new Elevations(Optional.of(surface), Optional.empty());
     }

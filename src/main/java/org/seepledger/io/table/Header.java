@@ -11,6 +11,7 @@ import java.util.Set;
 import java.util.function.Consumer;
 import java.util.stream.Collectors;
 import org.seepledger.fault.DataFault;
+import org.seepledger.io.NearestName;
 import org.seepledger.unit.Measure;
 
 /** The header line of a table: the columns' names and units. */
@@ -162,7 +163,9 @@ final class Header {
         return fault(
                 "no column " + Shown.text(name) + " among " + Shown.list(names(), MOST_NAMES_SHOWN),
                 "a column of that name",
-                "The nearest is " + Shown.text(NearestName.to(name, candidates)) + ".");
+                NearestName.of(name, candidates)
+                        .map(near -> "The nearest is " + Shown.text(near) + ".")
+                        .orElse("Name one of those that are there."));
     }
 
     /**

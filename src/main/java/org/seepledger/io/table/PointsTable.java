@@ -6,8 +6,6 @@ import java.util.List;
 import java.util.OptionalInt;
 import java.util.Set;
 import java.util.function.Consumer;
-import org.seepledger.aquifer.Axis;
-import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.PointRate;
 import org.seepledger.fault.DataFault;
 import org.seepledger.io.table.SpanReader.Span;
@@ -118,18 +116,12 @@ public final class PointsTable {
     }
 
     private void checkInside(double x, double y) {
-        Grid grid = frame.grid();
-        if (!covers(grid.x(), grid.localX(x, y)) || !covers(grid.y(), grid.localY(x, y))) {
+        if (!frame.grid().holds(x, y)) {
             throw table.fault(
                     "a point outside the grid, at x " + CsvText.number(x) + ", y " + CsvText.number(y),
                     "one on the grid, " + frame.extent(),
                     "Check the coordinates and their crs, or take the line out.");
         }
-    }
-
-    private static boolean covers(Axis axis, double distance) {
-        int cell = axis.cellAt(distance);
-        return cell >= 0 && cell < axis.count();
     }
 
     private String category() {

@@ -193,11 +193,4 @@ class TableReaderTest {
         assertFault(() -> read("a\n" + "1\n".repeat(1_001))).startsWith("data/t.csv, line 1002: found more lines");
         assertFault(() -> read("a,".repeat(10_000) + "a\n")).startsWith("data/t.csv, line 1: found 10001 columns");
     }
-
-    @ParameterizedTest
-    @CsvSource({"rat, rate, 1", "LAYER, layer, 5", "'', abc, 3", "kitten, sitting, 3"})
-    void measuresHowFarNamesAreApart(String from, String to, int distance) {
-        assertThat(NearestName.distance(from, to)).isEqualTo(distance);
-        assertThat(NearestName.to(from, List.of("quite another name", to))).isEqualTo(to);
-    }
 }
