@@ -137,12 +137,15 @@ public record Aquifer(
     public IntervalState state(int interval, CellGeometry geometry, List<PlacedWell> wells) {
         Saturation saturation = Saturation.of(geometry, layers, head, interval);
         FaceFlows flows = flow.faceFlows(interval, geometry, saturation);
-        CellTerms terms = new CellTerms(this, interval, geometry, flows.active());
+        CellTerms terms = new CellTerms(this, interval, geometry, saturation, flows.active());
         List<WellRate> rates = new ArrayList<>();
+        Optional<double[]> conductivity = wells.isEmpty()
+                ? Optional.empty()
+                : flow.knownConductivity().map(values -> geometry.block().read(values, interval));
         for (PlacedWell well : wells) {
             double rate = well.well().meanRate(times.instant(interval), times.instant(interval + 1));
             if (rate != 0) {
-                rates.addAll(well.shares(rate, geometry, flows.active()));
+                rates.addAll(well.shares(rate, geometry, flows.active(), conductivity));
             }
         }
         List<CellTerm> all = new ArrayList<>(terms.sources());
@@ -150,6 +153,6 @@ public record Aquifer(
         if (storageFromHeads()) {
             all.addAll(terms.storageFromHeads());
         }
-        return new IntervalState(geometry, flows, all, rates);
+        return new IntervalState(geometry, saturation, flows, all, rates);
     }
 }

@@ -62,7 +62,7 @@ public final class CellGeometry {
         for (int i = 0; i < top.length; i++) {
             if (top[i] - bottom[i] < -tolerance(i)) {
                 throw new DataFault(
-                        "layer " + (i / size + 1),
+                        "the layers",
                         place(i),
                         "a top of " + top[i] + " below a bottom of " + bottom[i],
                         "surfaces that do not cross",
@@ -70,7 +70,7 @@ public final class CellGeometry {
             }
             if (i >= size && Math.abs(top[i] - bottom[i - size]) > tolerance(i)) {
                 throw new DataFault(
-                        "layer " + (i / size + 1),
+                        "the layers",
                         place(i),
                         "a top of " + top[i] + " under a layer that ends at " + bottom[i - size],
                         "layers that touch",
@@ -83,11 +83,24 @@ public final class CellGeometry {
         return TOUCHING * Math.max(1, Math.max(Math.abs(top[cell]), Math.abs(bottom[cell])));
     }
 
-    private String place(int cell) {
-        int inLayer = cell % block.window().size();
-        int row = block.window().row() + inLayer / block.window().columns();
-        int column = block.window().column() + inLayer % block.window().columns();
-        return "row " + (row + 1) + ", column " + (column + 1);
+    /** Where a cell is, as users count. */
+    String place(int cell) {
+        return "layer " + (cell / block.window().size() + 1) + ", row " + (row(cell) + 1) + ", column "
+                + (column(cell) + 1);
+    }
+
+    private int row(int cell) {
+        return block.window().row()
+                + cell % block.window().size() / block.window().columns();
+    }
+
+    private int column(int cell) {
+        return block.window().column() + cell % block.window().columns();
+    }
+
+    /** A cell's plan area, in length units squared. */
+    double area(int cell) {
+        return grid.area(row(cell), column(cell));
     }
 
     /**

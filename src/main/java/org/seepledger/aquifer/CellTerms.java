@@ -10,9 +10,11 @@ final class CellTerms {
     private final int interval;
     private final CellGeometry geometry;
     private final Block block;
+    private final Saturation saturation;
     private final boolean[] active;
 
-    CellTerms(Aquifer aquifer, int interval, CellGeometry geometry, boolean[] active) {
+    CellTerms(Aquifer aquifer, int interval, CellGeometry geometry, Saturation saturation, boolean[] active) {
+        this.saturation = saturation;
         this.aquifer = aquifer;
         this.interval = interval;
         this.geometry = geometry;
@@ -39,18 +41,20 @@ final class CellTerms {
     }
 
     List<CellTerm> storageFromHeads() {
-        GriddedValues head = aquifer.head().orElseThrow();
-        double[] start = block.read(head, interval);
-        double[] end = block.read(head, interval + 1);
-        StorageRelease release = new StorageRelease(
-                geometry, aquifer.layers(), start, end, aquifer.times().length(interval));
+        StorageRelease release =
+                new StorageRelease(geometry, saturation, aquifer.times().length(interval));
         List<CellTerm> terms = new ArrayList<>();
-        aquifer.storage()
-                .specificYield()
-                .ifPresent(yield -> terms.add(
-                        new CellTerm(true, Aquifer.WATER_TABLE_STORAGE, release.waterTable(yield, active), 0, 0)));
-        terms.add(new CellTerm(true, Aquifer.ELASTIC_STORAGE, release.elastic(aquifer.storage(), active), 0, 0));
+        aquifer.storage().specificYield().ifPresent(yield -> {
+            double[] rates = release.waterTable(yield, active);
+            terms.add(released(Aquifer.WATER_TABLE_STORAGE, CellTerm.Entry.WHERE_IT_PASSES, rates));
+        });
+        double[] rates = release.elastic(aquifer.storage(), active);
+        terms.add(released(Aquifer.ELASTIC_STORAGE, CellTerm.Entry.THROUGHOUT, rates));
         return terms;
+    }
+
+    private static CellTerm released(String item, CellTerm.Entry entry, double[] rates) {
+        return new CellTerm(true, item, entry, rates, 0, 0);
     }
 
     private CellTerm term(boolean storage, String item, GriddedValues values, boolean perArea) {
@@ -77,7 +81,8 @@ final class CellTerms {
                 }
             }
         }
-        return new CellTerm(storage, item, rates, missing, lost);
+        CellTerm.Entry entry = perArea ? CellTerm.Entry.AT_WATER_TABLE : CellTerm.Entry.THROUGHOUT;
+        return new CellTerm(storage, item, entry, rates, missing, lost);
     }
 
     private int uppermost(int row, int column) {

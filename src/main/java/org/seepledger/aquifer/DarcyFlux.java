@@ -21,6 +21,11 @@ public record DarcyFlux(
         implements Flow {
 
     @Override
+    public String given() {
+        return "specific discharge at cell centres";
+    }
+
+    @Override
     public boolean closedSides() {
         return !outerFaces.sides();
     }
@@ -31,7 +36,7 @@ public record DarcyFlux(
         double[] qx = block.read(x, interval);
         double[] qy = block.read(y, interval);
         double[] qz = z.map(values -> block.read(values, interval)).orElseGet(() -> new double[block.size()]);
-        boolean[] active = saturation.active().clone();
+        boolean[] active = saturation.active();
         for (int i = 0; i < active.length; i++) {
             active[i] &= !Double.isNaN(qx[i]) && !Double.isNaN(qy[i]) && !Double.isNaN(qz[i]);
         }

@@ -1,7 +1,9 @@
 package org.seepledger.aquifer;
 
+import java.util.Optional;
+
 /** What was given of flow, from which flows through cell faces follow. */
-public sealed interface Flow permits DarcyFlux, GivenFaceFlow {
+public sealed interface Flow permits DarcyFlux, GivenFaceFlow, HeadGradient {
 
     /**
      * Works out the face flows of one interval.
@@ -17,4 +19,16 @@ public sealed interface Flow permits DarcyFlux, GivenFaceFlow {
      * {@return whether nothing can flow through the grid's outer sides because the set says so}
      */
     boolean closedSides();
+
+    /**
+     * {@return what was given, in words}
+     */
+    String given();
+
+    /**
+     * {@return horizontal conductivity by interval, where the flow was given by it}
+     */
+    default Optional<GriddedValues> knownConductivity() {
+        return Optional.empty();
+    }
 }

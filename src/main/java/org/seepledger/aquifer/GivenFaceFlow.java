@@ -27,6 +27,11 @@ public record GivenFaceFlow(
         implements Flow {
 
     @Override
+    public String given() {
+        return "volumetric flow through cell faces";
+    }
+
+    @Override
     public boolean closedSides() {
         return false;
     }

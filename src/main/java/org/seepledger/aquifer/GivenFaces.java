@@ -25,7 +25,7 @@ final class GivenFaces {
         this.west = given.west().map(values -> block.read(values, interval));
         this.south = given.south().map(values -> block.read(values, interval));
         this.down = given.down().map(values -> block.read(values, interval));
-        this.active = saturation.active().clone();
+        this.active = saturation.active();
         for (int i = 0; i < active.length; i++) {
             active[i] &= !Double.isNaN(east[i]) && !Double.isNaN(north[i]) && !Double.isNaN(up[i]);
         }

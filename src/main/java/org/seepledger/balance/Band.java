@@ -1,6 +1,7 @@
 package org.seepledger.balance;
 
 import java.util.List;
+import java.util.Optional;
 import java.util.stream.IntStream;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.Block;
@@ -35,11 +36,14 @@ final class Band {
         CellGeometry geometry = aquifer.geometry(window);
         int intervals = aquifer.times().intervals();
         BandResult result = new BandResult(prisms, intervals);
+        Window block = geometry.block().window();
+        List<Optional<Elevations>> elevations =
+                prisms.stream().map(prism -> prism.elevations(block)).toList();
         double record = aquifer.times().instant(intervals) - aquifer.times().instant(0);
         for (int interval = 0; interval < intervals; interval++) {
             IntervalState state = aquifer.state(interval, geometry, wells);
             for (int prism = 0; prism < prisms.size(); prism++) {
-                prisms.get(prism).book(state, result.tally(interval, prism));
+                prisms.get(prism).book(state, elevations.get(prism), result.tally(interval, prism));
             }
             addImbalance(state, aquifer.times().length(interval) / record);
             result.note(interval, state);

@@ -4,9 +4,9 @@ import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.Block;
-import org.seepledger.aquifer.CellGeometry;
 import org.seepledger.aquifer.CellTerm;
 import org.seepledger.aquifer.FaceFlows;
 import org.seepledger.aquifer.IntervalState;
@@ -16,6 +16,7 @@ import org.seepledger.aquifer.Window;
 import org.seepledger.prism.Coverage;
 import org.seepledger.prism.Pieces;
 import org.seepledger.prism.PrismCut;
+import org.seepledger.prism.VerticalRange;
 import org.seepledger.prism.WellCut;
 
 /** Books the flows of one prism, band by band. */
@@ -45,13 +46,23 @@ final class PrismAccounts {
         return wells;
     }
 
+    /** The elevations of the prism's lids over a window; empty where they are interfaces. */
+    Optional<Elevations> elevations(Window window) {
+        return cut.prism().range() instanceof VerticalRange.Elevations range
+                ? Optional.of(new Elevations(range, window))
+                : Optional.empty();
+    }
+
     Tally emptyTally() {
         return new Tally(chart.accounts().size(), chart.layers());
     }
 
     /** Books what one band of rows holds of the prism in one interval. */
-    void book(IntervalState state, Tally tally) {
-        bookPieces(state, tally);
+    void book(IntervalState state, Optional<Elevations> elevations, Tally tally) {
+        Slab slab = elevations
+                .<Slab>map(between -> new ElevationSlab(chart, cut.coverage(), between, state))
+                .orElseGet(() -> new LayerSlab(chart, state));
+        bookPieces(state, slab, tally);
         Window rows = state.geometry().inner();
         Coverage coverage = cut.coverage();
         int from = Math.max(rows.row(), coverage.window().row());
@@ -60,15 +71,16 @@ final class PrismAccounts {
             for (int column = coverage.firstColumn(row); column < coverage.columnEnd(row); column++) {
                 double share = coverage.share(row, column);
                 if (share != 0) {
-                    bookLids(state, row, column, share, tally);
-                    bookCells(state, row, column, share, tally);
+                    slab.bookLids(row, column, share, tally);
+                    slab.bookRisers(row, column, tally);
+                    bookCells(state, slab, row, column, share, tally);
                 }
             }
         }
-        bookWells(state, tally);
+        bookWells(state, slab, tally);
     }
 
-    private void bookPieces(IntervalState state, Tally tally) {
+    private void bookPieces(IntervalState state, Slab slab, Tally tally) {
         FaceFlows flows = state.flows();
         Block block = flows.block();
         Pieces pieces = cut.pieces();
@@ -84,10 +96,11 @@ final class PrismAccounts {
                 double south = flows.y()[block.yFace(layer, row + 1, column)];
                 double north = flows.y()[block.yFace(layer, row, column)];
                 double more = extra == null ? 0 : extra[layer - chart.first()];
+                double part = slab.part(layer, row, column);
                 tally.throughPiece(
                         chart.side(cut.item(pieces.side(piece)), layer),
-                        pieces.outflowAtStart(piece, west, east, south, north) + more,
-                        pieces.outflowAtEnd(piece, west, east, south, north) + more);
+                        part * (pieces.outflowAtStart(piece, west, east, south, north) + more),
+                        part * (pieces.outflowAtEnd(piece, west, east, south, north) + more));
             }
         }
     }
@@ -111,21 +124,7 @@ final class PrismAccounts {
         return carried;
     }
 
-    private void bookLids(IntervalState state, int row, int column, double share, Tally tally) {
-        FaceFlows flows = state.flows();
-        CellGeometry geometry = state.geometry();
-        Block block = flows.block();
-        boolean open = false;
-        for (int layer = chart.first(); layer <= chart.last(); layer++) {
-            open |= !geometry.isPinchedOut(block.cell(layer, row, column));
-        }
-        if (open) {
-            tally.throughFace(chart.top(), share * flows.z()[block.zFace(chart.first(), row, column)]);
-            tally.throughFace(chart.bottom(), -share * flows.z()[block.zFace(chart.last() + 1, row, column)]);
-        }
-    }
-
-    private void bookCells(IntervalState state, int row, int column, double share, Tally tally) {
+    private void bookCells(IntervalState state, Slab slab, int row, int column, double share, Tally tally) {
         FaceFlows flows = state.flows();
         for (int layer = chart.first(); layer <= chart.last(); layer++) {
             int cell = flows.block().cell(layer, row, column);
@@ -134,24 +133,26 @@ final class PrismAccounts {
                         layer - chart.first(), share * state.geometry().grid().area(row, column));
                 continue;
             }
-            tally.fromVolume(-share * flows.gain(layer, row, column), flows.gross(layer, row, column));
+            tally.fromVolume(share * slab.outflow(layer, row, column), flows.gross(layer, row, column));
             for (CellTerm term : state.terms()) {
                 int account = term.storage() ? chart.storage(term.item(), layer) : chart.source(term.item(), layer);
-                tally.added(account, share * term.rates()[cell]);
+                double counted = share * slab.counted(term.entry(), layer, row, column);
+                tally.added(account, counted * term.rates()[cell]);
             }
         }
     }
 
-    private void bookWells(IntervalState state, Tally tally) {
+    private void bookWells(IntervalState state, Slab slab, Tally tally) {
         for (WellRate rate : state.wells()) {
             WellCut met = wells.get(rate.well());
             if (!chart.holds(rate.layer())) {
                 continue;
             }
             double counted = rule == WellRule.SPREAD ? met.share() : met.inside() ? 1 : 0;
-            tally.added(chart.source(rate.well().well().category(), rate.layer()), counted * rate.rate());
+            double part = slab.part(rate.layer(), rate.well().row(), rate.well().column());
+            tally.added(chart.source(rate.well().well().category(), rate.layer()), counted * part * rate.rate());
             tally.fromVolume(
-                    (counted - met.share()) * rate.rate(), met.pieces().length == 0 ? 0 : Math.abs(rate.rate()));
+                    part * (counted - met.share()) * rate.rate(), met.pieces().length == 0 ? 0 : Math.abs(rate.rate()));
         }
     }
 }

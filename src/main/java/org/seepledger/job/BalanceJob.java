@@ -12,11 +12,11 @@ import org.seepledger.aquifer.Aquifer;
 import org.seepledger.balance.Balance;
 import org.seepledger.balance.Periods;
 import org.seepledger.balance.WaterBalance;
-import org.seepledger.fault.DataFault;
 import org.seepledger.fault.UsageFault;
 import org.seepledger.io.aquifer.AquiferFolder;
 import org.seepledger.io.aquifer.AquiferReader;
 import org.seepledger.io.prisms.PrismsReader;
+import org.seepledger.io.prisms.SurfaceRasters;
 import org.seepledger.io.raster.GeoTiffWriter;
 import org.seepledger.io.result.BudgetCsv;
 import org.seepledger.io.result.FacesGeoJson;
@@ -56,7 +56,7 @@ public final class BalanceJob {
      * @param progress told how far the work is
      * @return what it came to; the files are in place
      * @throws UsageFault if the request cannot be met
-     * @throws DataFault if the data are wrong; nothing is written then
+     * @throws org.seepledger.fault.DataFault if the data are wrong; nothing is written then
      * @throws org.seepledger.fault.ProgramFault if an identity that must hold does not; nothing is written then
      * @throws org.seepledger.progress.Cancelled if the work was stopped; nothing is written then
      * @throws IOException if a file cannot be read or written
@@ -69,11 +69,17 @@ public final class BalanceJob {
     }
 
     private BalanceOutcome run(AquiferFolder folder, OutputFolder out) throws IOException {
+        try (SurfaceRasters surfaces = new SurfaceRasters(folder.aquifer().grid(), notes::add)) {
+            return run(folder, surfaces, out);
+        }
+    }
+
+    private BalanceOutcome run(AquiferFolder folder, SurfaceRasters surfaces, OutputFolder out) throws IOException {
         Aquifer aquifer = folder.aquifer();
         warnings.addAll(folder.warnings());
         notes.addAll(folder.notes());
         ResultUnits units = units(aquifer);
-        List<Prism> prisms = prisms(folder);
+        List<Prism> prisms = prisms(folder, surfaces);
         List<Period> periods = periods(aquifer);
         stopwatch.lap("reading");
         Balance balance = WaterBalance.of(aquifer, prisms, request.wells(), request.threads(), progress);
@@ -89,7 +95,7 @@ public final class BalanceJob {
                 .toList();
         Statement statement = new Statement(
                 "Water budget of \"" + aquifer.name() + "\" by seepledger " + Version.text(),
-                inputs(folder),
+                inputs(folder, surfaces),
                 folder.origins(),
                 warnings);
         BudgetCsv.write(out.file("budget.csv"), statement, budgets, aquifer.times(), units);
@@ -115,39 +121,17 @@ public final class BalanceJob {
         }
     }
 
-    private List<Prism> prisms(AquiferFolder folder) {
+    private List<Prism> prisms(AquiferFolder folder, SurfaceRasters surfaces) {
         Aquifer aquifer = folder.aquifer();
         List<Prism> prisms = new PrismsReader(
-                        folder.crs(),
-                        aquifer.grid(),
-                        aquifer.layers().size(),
-                        request.clip(),
-                        (path, shown) -> {
-                            throw notYet(shown);
-                        },
-                        notes::add)
+                        folder.crs(), aquifer.grid(), aquifer.layers().size(), request.clip(), surfaces, notes::add)
                 .read(request.prisms(), request.prisms().toString());
-        prisms.stream()
-                .filter(prism -> !(prism.range() instanceof org.seepledger.prism.VerticalRange.Layers))
-                .findFirst()
-                .ifPresent(prism -> {
-                    throw notYet("prism \"" + prism.name() + "\"");
-                });
         new Overlaps(aquifer.grid(), aquifer.layers().size(), aquifer::surface)
                 .of(prisms)
                 .forEach(overlap -> warnings.add("\"" + overlap.first() + "\" and \"" + overlap.second()
                         + "\" overlap over " + Figures.shown(overlap.area()) + " " + aquifer.lengthUnit()
                         + "2: what lies in both counts in both."));
         return prisms;
-    }
-
-    private DataFault notYet(String place) {
-        return new DataFault(
-                request.prisms().toString(),
-                place,
-                "a top or bottom given as elevation or surface, which this version does not cut at yet",
-                "a range of layers",
-                "Give \"layers\": [first, last].");
     }
 
     private List<Period> periods(Aquifer aquifer) {
@@ -162,9 +146,10 @@ public final class BalanceJob {
                 ledger.prism(), periods.stream().map(ledger::budget).toList());
     }
 
-    private List<FileRecord> inputs(AquiferFolder folder) throws IOException {
+    private List<FileRecord> inputs(AquiferFolder folder, SurfaceRasters surfaces) throws IOException {
         Map<String, Path> files = new LinkedHashMap<>(folder.inputs());
         files.put(request.prisms().toString(), request.prisms());
+        files.putAll(surfaces.inputs());
         request.periods().ifPresent(file -> files.put(file.toString(), file));
         progress.begin("fingerprinting inputs", files.size());
         List<FileRecord> records = new ArrayList<>();

@@ -88,7 +88,7 @@ public final class AquiferReader {
         Frame frame = new Frame(grid, layerNodes.size(), times());
         Bindings bindings = new Bindings(files, frame);
         List<Layer> layers = layers(layerNodes, bindings);
-        Flow flow = new FlowReader(root.get("flow"), bindings, length, time, warnings).read();
+        Flow flow = new FlowReader(root.get("flow"), root.has("head"), bindings, length, time, warnings).read();
         Optional<GriddedValues> head = root.has("head")
                 ? Optional.of(bindings.values("head", root.get("head"), "head", length, StepKind.INSTANT))
                 : Optional.empty();
