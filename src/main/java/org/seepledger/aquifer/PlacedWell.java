@@ -27,8 +27,8 @@ public record PlacedWell(Well well, int row, int column, double across, double u
      * @param grid the grid
      */
     public static PlacedWell of(Well well, Grid grid) {
-        double x = grid.x().snapped(grid.localX(well.x(), well.y()));
-        double y = grid.y().snapped(grid.localY(well.x(), well.y()));
+        double x = grid.snappedX(well.x(), well.y());
+        double y = grid.snappedY(well.x(), well.y());
         int column = grid.x().cellAt(x);
         int fromSouth = grid.y().cellAt(y);
         return new PlacedWell(

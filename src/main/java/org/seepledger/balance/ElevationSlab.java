@@ -5,7 +5,6 @@ import org.seepledger.aquifer.CellGeometry;
 import org.seepledger.aquifer.CellTerm;
 import org.seepledger.aquifer.FaceFlows;
 import org.seepledger.aquifer.IntervalState;
-import org.seepledger.prism.Coverage;
 
 /**
  * A range between two elevations or surfaces, which cut cells.
@@ -18,17 +17,13 @@ import org.seepledger.prism.Coverage;
  */
 final class ElevationSlab implements Slab {
 
-    private final Chart chart;
-    private final Coverage coverage;
     private final Elevations elevations;
     private final IntervalState state;
     private final FaceFlows flows;
     private final Block block;
     private final CellGeometry geometry;
 
-    ElevationSlab(Chart chart, Coverage coverage, Elevations elevations, IntervalState state) {
-        this.chart = chart;
-        this.coverage = coverage;
+    ElevationSlab(Elevations elevations, IntervalState state) {
         this.elevations = elevations;
         this.state = state;
         this.flows = state.flows();
@@ -36,16 +31,21 @@ final class ElevationSlab implements Slab {
         this.geometry = state.geometry();
     }
 
-    private double low(int cell, int row, int column) {
-        return partBelow(cell, elevations.bottom(row, column));
+    @Override
+    public double low(int layer, int row, int column) {
+        return partBelow(block.cell(layer, row, column), elevations.bottom(row, column));
     }
 
-    private double high(int cell, int row, int column) {
-        return partBelow(cell, elevations.top(row, column));
+    @Override
+    public double high(int layer, int row, int column) {
+        return partBelow(block.cell(layer, row, column), elevations.top(row, column));
     }
 
     /** The part of a cell's saturated height below an elevation. */
     private double partBelow(int cell, double elevation) {
+        if (!geometry.isPresent(cell)) {
+            return 0;
+        }
         double above = elevation - geometry.bottom(cell);
         double height = height(cell);
         return above <= 0 ? 0 : above >= height ? 1 : above / height;
@@ -54,12 +54,6 @@ final class ElevationSlab implements Slab {
     private double height(int cell) {
         double saturated = state.saturation().thickness(cell);
         return saturated > 0 ? saturated : geometry.thickness(cell);
-    }
-
-    @Override
-    public double part(int layer, int row, int column) {
-        int cell = block.cell(layer, row, column);
-        return flows.active()[cell] ? high(cell, row, column) - low(cell, row, column) : 0;
     }
 
     @Override
@@ -110,74 +104,62 @@ final class ElevationSlab implements Slab {
     }
 
     @Override
-    public void bookLids(int row, int column, double share, Tally tally) {
-        double top = elevations.top(row, column);
-        double bottom = elevations.bottom(row, column);
-        if (top <= bottom) {
-            return;
-        }
-        int upper = layerAt(row, column, top, true);
-        int lower = layerAt(row, column, bottom, false);
-        if (upper >= 0 && lower >= 0 && upper <= lower) {
-            tally.throughFace(chart.top(upper), share * upward(upper, row, column, top));
-            tally.throughFace(chart.bottom(lower), -share * upward(lower, row, column, bottom));
-        }
-    }
-
-    /**
-     * The layer in which a lid lies, as far as cells have thickness: for a top on an interface the one below it, for a
-     * bottom the one above; -1 where the lid misses the column.
-     */
-    private int layerAt(int row, int column, double elevation, boolean top) {
-        int found = -1;
-        for (int layer = 0; layer < block.layers(); layer++) {
-            int cell = block.cell(layer, row, column);
-            if (!geometry.isPresent(cell)) {
-                continue;
-            }
-            boolean below = top ? geometry.bottom(cell) < elevation : geometry.top(cell) > elevation;
-            if (top && below) {
-                return layer;
-            }
-            found = !top && below ? layer : found;
-        }
-        return found;
+    public double top(int row, int column) {
+        int layer = lids(row, column)[0];
+        return layer < 0
+                ? Double.NaN
+                : Math.min(elevations.top(row, column), geometry.top(block.cell(layer, row, column)));
     }
 
     @Override
-    public void bookRisers(int row, int column, Tally tally) {
-        double toWest = coverage.westFace(row, column);
-        double toNorth = coverage.northFace(row, column);
-        for (int layer = chart.first(); layer <= chart.last(); layer++) {
-            if (toWest != 0) {
-                double flow = toWest * flows.x()[block.xFace(layer, row, column)];
-                bookRiser(layer, flow, row, column - 1, row, column, tally);
-            }
-            if (toNorth != 0) {
-                double flow = toNorth * flows.y()[block.yFace(layer, row, column)];
-                bookRiser(layer, flow, row, column, row - 1, column, tally);
-            }
-        }
+    public double bottom(int row, int column) {
+        int layer = lids(row, column)[1];
+        return layer < 0
+                ? Double.NaN
+                : Math.max(elevations.bottom(row, column), geometry.bottom(block.cell(layer, row, column)));
     }
 
-    /** Books a flow from one cell to its neighbour, as far as it leaves or enters the prism through a step. */
-    private void bookRiser(int layer, double flow, int row, int column, int nextRow, int nextColumn, Tally tally) {
-        if (flow == 0) {
-            return;
+    @Override
+    public int topLayer(int row, int column) {
+        return lids(row, column)[0];
+    }
+
+    @Override
+    public int bottomLayer(int row, int column) {
+        return lids(row, column)[1];
+    }
+
+    @Override
+    public double upwardAtTop(int row, int column) {
+        return upward(topLayer(row, column), row, column, elevations.top(row, column));
+    }
+
+    @Override
+    public double upwardAtBottom(int row, int column) {
+        return upward(bottomLayer(row, column), row, column, elevations.bottom(row, column));
+    }
+
+    @Override
+    public boolean hasRisers() {
+        return true;
+    }
+
+    /**
+     * The layers in which top and bottom lie, as far as cells have thickness: for a top on an interface the one below it,
+     * for a bottom the one above; -1 where the range misses the column.
+     */
+    private int[] lids(int row, int column) {
+        double top = elevations.top(row, column);
+        double bottom = elevations.bottom(row, column);
+        int upper = -1;
+        int lower = -1;
+        for (int layer = 0; layer < block.layers() && top > bottom; layer++) {
+            int cell = block.cell(layer, row, column);
+            if (geometry.isPresent(cell) && geometry.bottom(cell) < top && geometry.top(cell) > bottom) {
+                upper = upper < 0 ? layer : upper;
+                lower = layer;
+            }
         }
-        int cell = block.cell(layer, row, column);
-        int next = block.cell(layer, nextRow, nextColumn);
-        double low = low(cell, row, column);
-        double high = high(cell, row, column);
-        double nextLow = low(next, nextRow, nextColumn);
-        double nextHigh = high(next, nextRow, nextColumn);
-        double throughTop = Math.max(high, nextLow) - Math.max(nextHigh, low);
-        double throughBottom = Math.min(nextLow, high) - Math.min(low, nextHigh);
-        if (throughTop != 0) {
-            tally.throughFace(chart.top(layer), flow * throughTop);
-        }
-        if (throughBottom != 0) {
-            tally.throughFace(chart.bottom(layer), flow * throughBottom);
-        }
+        return new int[] {upper, lower};
     }
 }

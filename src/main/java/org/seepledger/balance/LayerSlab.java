@@ -1,16 +1,21 @@
 package org.seepledger.balance;
 
 import org.seepledger.aquifer.Block;
+import org.seepledger.aquifer.CellGeometry;
 import org.seepledger.aquifer.CellTerm;
-import org.seepledger.aquifer.FaceFlows;
 import org.seepledger.aquifer.IntervalState;
 
 /** A range of whole layers: its lids are interfaces. */
 record LayerSlab(Chart chart, IntervalState state) implements Slab {
 
     @Override
-    public double part(int layer, int row, int column) {
-        return 1;
+    public double low(int layer, int row, int column) {
+        return 0;
+    }
+
+    @Override
+    public double high(int layer, int row, int column) {
+        return chart.holds(layer) ? 1 : 0;
     }
 
     @Override
@@ -24,29 +29,53 @@ record LayerSlab(Chart chart, IntervalState state) implements Slab {
     }
 
     @Override
-    public void bookLids(int row, int column, double share, Tally tally) {
-        if (isOpen(row, column)) {
-            FaceFlows flows = state.flows();
-            Block block = flows.block();
-            double up = flows.z()[block.zFace(chart.first(), row, column)];
-            double upFromBelow = flows.z()[block.zFace(chart.last() + 1, row, column)];
-            tally.throughFace(chart.top(chart.first()), share * up);
-            tally.throughFace(chart.bottom(chart.last()), -share * upFromBelow);
-        }
-    }
-
-    /** Whether any layer of the range has thickness here. */
-    private boolean isOpen(int row, int column) {
+    public double top(int row, int column) {
+        CellGeometry geometry = state.geometry();
         for (int layer = chart.first(); layer <= chart.last(); layer++) {
-            if (!state.geometry().isPinchedOut(state.flows().block().cell(layer, row, column))) {
-                return true;
+            int cell = geometry.block().cell(layer, row, column);
+            if (!geometry.isPinchedOut(cell)) {
+                return geometry.top(cell);
             }
         }
-        return false;
+        return Double.NaN;
     }
 
     @Override
-    public void bookRisers(int row, int column, Tally tally) {
-        // Whole layers have no steps: what flows from cell to cell stays inside.
+    public double bottom(int row, int column) {
+        CellGeometry geometry = state.geometry();
+        for (int layer = chart.last(); layer >= chart.first(); layer--) {
+            int cell = geometry.block().cell(layer, row, column);
+            if (!geometry.isPinchedOut(cell)) {
+                return geometry.bottom(cell);
+            }
+        }
+        return Double.NaN;
+    }
+
+    @Override
+    public int topLayer(int row, int column) {
+        return chart.first();
+    }
+
+    @Override
+    public int bottomLayer(int row, int column) {
+        return chart.last();
+    }
+
+    @Override
+    public double upwardAtTop(int row, int column) {
+        Block block = state.flows().block();
+        return state.flows().z()[block.zFace(chart.first(), row, column)];
+    }
+
+    @Override
+    public double upwardAtBottom(int row, int column) {
+        Block block = state.flows().block();
+        return state.flows().z()[block.zFace(chart.last() + 1, row, column)];
+    }
+
+    @Override
+    public boolean hasRisers() {
+        return false;
     }
 }

@@ -57,11 +57,15 @@ final class PrismAccounts {
         return new Tally(chart.accounts().size(), chart.layers());
     }
 
-    /** Books what one band of rows holds of the prism in one interval. */
-    void book(IntervalState state, Optional<Elevations> elevations, Tally tally) {
-        Slab slab = elevations
-                .<Slab>map(between -> new ElevationSlab(chart, cut.coverage(), between, state))
+    /** How the prism's vertical range meets the cells of a band in one interval. */
+    Slab slab(IntervalState state, Optional<Elevations> elevations) {
+        return elevations
+                .<Slab>map(between -> new ElevationSlab(between, state))
                 .orElseGet(() -> new LayerSlab(chart, state));
+    }
+
+    /** Books what one band of rows holds of the prism in one interval. */
+    void book(IntervalState state, Slab slab, Tally tally) {
         bookPieces(state, slab, tally);
         Window rows = state.geometry().inner();
         Coverage coverage = cut.coverage();
@@ -71,8 +75,10 @@ final class PrismAccounts {
             for (int column = coverage.firstColumn(row); column < coverage.columnEnd(row); column++) {
                 double share = coverage.share(row, column);
                 if (share != 0) {
-                    slab.bookLids(row, column, share, tally);
-                    slab.bookRisers(row, column, tally);
+                    bookLids(slab, row, column, share, tally);
+                    if (slab.hasRisers()) {
+                        bookRisers(state.flows(), slab, row, column, tally);
+                    }
                     bookCells(state, slab, row, column, share, tally);
                 }
             }
@@ -81,8 +87,6 @@ final class PrismAccounts {
     }
 
     private void bookPieces(IntervalState state, Slab slab, Tally tally) {
-        FaceFlows flows = state.flows();
-        Block block = flows.block();
         Pieces pieces = cut.pieces();
         Map<Integer, double[]> carried = carriedForWells(state.wells());
         int end = pieces.firstFrom(state.geometry().inner().rowEnd());
@@ -91,22 +95,67 @@ final class PrismAccounts {
             int column = pieces.column(piece);
             double[] extra = carried.get(piece);
             for (int layer = chart.first(); layer <= chart.last(); layer++) {
-                double west = flows.x()[block.xFace(layer, row, column)];
-                double east = flows.x()[block.xFace(layer, row, column + 1)];
-                double south = flows.y()[block.yFace(layer, row + 1, column)];
-                double north = flows.y()[block.yFace(layer, row, column)];
-                double more = extra == null ? 0 : extra[layer - chart.first()];
                 double part = slab.part(layer, row, column);
-                tally.throughPiece(
-                        chart.side(cut.item(pieces.side(piece)), layer),
-                        part * (pieces.outflowAtStart(piece, west, east, south, north) + more),
-                        part * (pieces.outflowAtEnd(piece, west, east, south, north) + more));
+                double[] density = density(state.flows(), piece, layer, extra);
+                int account = chart.side(cut.item(pieces.side(piece)), layer);
+                tally.throughPiece(account, part * density[0], part * density[1]);
             }
         }
     }
 
+    /** The outflow density at a piece's begin and end, if the whole height of its cell counts. */
+    double[] density(FaceFlows flows, int piece, int layer, double[] carriedByLayer) {
+        Pieces pieces = cut.pieces();
+        Block block = flows.block();
+        int row = pieces.row(piece);
+        int column = pieces.column(piece);
+        double west = flows.x()[block.xFace(layer, row, column)];
+        double east = flows.x()[block.xFace(layer, row, column + 1)];
+        double south = flows.y()[block.yFace(layer, row + 1, column)];
+        double north = flows.y()[block.yFace(layer, row, column)];
+        double carried = carriedByLayer == null ? 0 : carriedByLayer[layer - chart.first()];
+        return new double[] {
+            pieces.outflowAtStart(piece, west, east, south, north) + carried,
+            pieces.outflowAtEnd(piece, west, east, south, north) + carried
+        };
+    }
+
+    private void bookLids(Slab slab, int row, int column, double share, Tally tally) {
+        if (!Double.isNaN(slab.top(row, column))) {
+            tally.throughFace(chart.top(slab.topLayer(row, column)), share * slab.upwardAtTop(row, column));
+            tally.throughFace(chart.bottom(slab.bottomLayer(row, column)), -share * slab.upwardAtBottom(row, column));
+        }
+    }
+
+    private void bookRisers(FaceFlows flows, Slab slab, int row, int column, Tally tally) {
+        Block block = flows.block();
+        double toWest = cut.coverage().westFace(row, column);
+        double toNorth = cut.coverage().northFace(row, column);
+        for (int layer = chart.first(); layer <= chart.last(); layer++) {
+            if (toWest != 0) {
+                double flow = toWest * flows.x()[block.xFace(layer, row, column)];
+                bookRiser(new Riser(layer, row, column - 1, row, column, flow), slab, tally);
+            }
+            if (toNorth != 0) {
+                double flow = toNorth * flows.y()[block.yFace(layer, row, column)];
+                bookRiser(new Riser(layer, row, column, row - 1, column, flow), slab, tally);
+            }
+        }
+    }
+
+    private void bookRiser(Riser riser, Slab slab, Tally tally) {
+        double throughTop = riser.throughTop(slab);
+        double throughBottom = riser.throughBottom(slab);
+        if (throughTop != 0) {
+            tally.throughFace(chart.top(riser.layer()), throughTop);
+        }
+        if (throughBottom != 0) {
+            tally.throughFace(chart.bottom(riser.layer()), throughBottom);
+        }
+    }
+
     /** What pieces in wells' cells carry beside the cells' own fields, by piece and layer. */
-    private Map<Integer, double[]> carriedForWells(List<WellRate> rates) {
+    Map<Integer, double[]> carriedForWells(List<WellRate> rates) {
         Map<Integer, double[]> carried = new HashMap<>();
         if (rule == WellRule.SPREAD) {
             return carried;

@@ -19,6 +19,7 @@ import org.seepledger.io.prisms.PrismsReader;
 import org.seepledger.io.prisms.SurfaceRasters;
 import org.seepledger.io.raster.GeoTiffWriter;
 import org.seepledger.io.result.BudgetCsv;
+import org.seepledger.io.result.ExchangeCsv;
 import org.seepledger.io.result.FacesGeoJson;
 import org.seepledger.io.result.FileRecord;
 import org.seepledger.io.result.PrismBudget;
@@ -29,11 +30,9 @@ import org.seepledger.io.table.PeriodsTable;
 import org.seepledger.ledger.Ledger;
 import org.seepledger.ledger.Period;
 import org.seepledger.ledger.PeriodBudget;
-import org.seepledger.prism.Overlaps;
 import org.seepledger.prism.Prism;
 import org.seepledger.progress.Progress;
 import org.seepledger.report.BalanceSummary;
-import org.seepledger.report.Figures;
 
 /** The water budget of prisms: reads, balances, writes the result files. */
 public final class BalanceJob {
@@ -99,6 +98,7 @@ public final class BalanceJob {
                 folder.origins(),
                 warnings);
         BudgetCsv.write(out.file("budget.csv"), statement, budgets, aquifer.times(), units);
+        ExchangeCsv.write(out.file("exchange.csv"), statement, balance.exchange(), periods, aquifer.times(), units);
         FacesGeoJson.write(out.file("faces.geojson"), crs(folder), prisms, records, units);
         writeImbalance(folder, balance, out);
         writeRecord(out, statement, balance);
@@ -126,11 +126,6 @@ public final class BalanceJob {
         List<Prism> prisms = new PrismsReader(
                         folder.crs(), aquifer.grid(), aquifer.layers().size(), request.clip(), surfaces, notes::add)
                 .read(request.prisms(), request.prisms().toString());
-        new Overlaps(aquifer.grid(), aquifer.layers().size(), aquifer::surface)
-                .of(prisms)
-                .forEach(overlap -> warnings.add("\"" + overlap.first() + "\" and \"" + overlap.second()
-                        + "\" overlap over " + Figures.shown(overlap.area()) + " " + aquifer.lengthUnit()
-                        + "2: what lies in both counts in both."));
         return prisms;
     }
 
