@@ -6,6 +6,7 @@ import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
 import java.util.stream.IntStream;
+import org.locationtech.jts.math.DD;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.PlacedWell;
 import org.seepledger.fault.ProgramFault;
@@ -50,7 +51,7 @@ public final class PrismCut {
     public static PrismCut of(Prism prism, Grid grid) {
         List<Side> sides = new ArrayList<>();
         List<Pieces.Piece> walked = new ArrayList<>();
-        double doubledArea = 0;
+        DD doubledArea = new DD(0);
         for (Ring ring : prism.rings()) {
             double[] xs = new double[ring.sides().size()];
             double[] ys = new double[xs.length];
@@ -63,11 +64,11 @@ public final class PrismCut {
                 int next = (i + 1) % xs.length;
                 new SideWalk(grid, sides.size(), xs[i], ys[i], xs[next], ys[next], walked).walk();
                 sides.add(ring.sides().get(i));
-                doubledArea += (xs[i] - xs[0]) * (ys[next] - ys[0]) - (xs[next] - xs[0]) * (ys[i] - ys[0]);
+                doubledArea.selfAdd((xs[i] - xs[0]) * (ys[next] - ys[0]) - (xs[next] - xs[0]) * (ys[i] - ys[0]));
             }
         }
         PrismCut cut = new PrismCut(prism, grid, List.copyOf(sides), new Pieces(walked));
-        cut.checkArea(0.5 * doubledArea * grid.planUnit() * grid.planUnit());
+        cut.checkArea(0.5 * doubledArea.doubleValue() * grid.planUnit() * grid.planUnit());
         return cut;
     }
 
@@ -83,18 +84,19 @@ public final class PrismCut {
         return List.copyOf(items);
     }
 
+    /** Adds in twice the precision, since rounding grows with the number of cells and they may be millions. */
     private void checkArea(double shoelace) {
-        double covered = 0;
+        DD covered = new DD(0);
         double touched = 0;
         for (int row = coverage.window().row(); row < coverage.window().rowEnd(); row++) {
             for (int column = coverage.firstColumn(row); column < coverage.columnEnd(row); column++) {
                 double share = coverage.share(row, column);
-                covered += share * grid.area(row, column);
+                covered.selfAdd(share * grid.area(row, column));
                 touched += share == 0 ? 0 : grid.area(row, column);
             }
         }
-        if (!(Math.abs(covered - shoelace) <= AREA_AGREES * touched)) {
-            throw new ProgramFault("The cells of prism \"" + prism.name() + "\" cover " + covered
+        if (!(Math.abs(covered.doubleValue() - shoelace) <= AREA_AGREES * touched)) {
+            throw new ProgramFault("The cells of prism \"" + prism.name() + "\" cover " + covered.doubleValue()
                     + ", but its polygon has an area of " + shoelace + ".");
         }
     }

@@ -27,6 +27,10 @@ record Sector(double across, double up) {
     private double sector(double px, double py, double qx, double qy) {
         double from = perimeterPlace(px, py);
         double to = perimeterPlace(qx, qy);
+        if (to < from && from - to < 0.5 && (px - across) * (qx - across) + (py - up) * (qy - up) > 0) {
+            // Two rays as good as one, put in the wrong order by rounding: not the whole way round.
+            return 0;
+        }
         double end = to < from ? to + 4 : to;
         double x = perimeterX(from);
         double y = perimeterY(from);
