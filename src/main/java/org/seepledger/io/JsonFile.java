@@ -49,8 +49,7 @@ public final class JsonFile {
         } catch (JsonProcessingException e) {
             throw malformed(e, shownFile);
         } catch (IOException e) {
-            throw new DataFault(
-                    shownFile, "", "what cannot be read (" + e.getMessage() + ")", "JSON", "Check the file.");
+            throw Unreadable.file(shownFile, e);
         }
     }
 
