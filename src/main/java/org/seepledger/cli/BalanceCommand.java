@@ -1,6 +1,5 @@
 package org.seepledger.cli;
 
-import java.io.IOException;
 import java.nio.file.Path;
 import java.util.Arrays;
 import java.util.Locale;
@@ -128,7 +127,7 @@ final class BalanceCommand implements Callable<Integer> {
     }
 
     @Override
-    public Integer call() throws IOException {
+    public Integer call() {
         measure("--mass-unit", massUnit, "kg");
         BalanceOutcome outcome = BalanceJob.run(request(), terminal.progress(progress));
         terminal.out().print(outcome.summary());
@@ -139,6 +138,9 @@ final class BalanceCommand implements Callable<Integer> {
                     .println("The worst closure error is " + outcome.worstClosureError() + " %, more than the "
                             + maxClosureError + " % allowed.");
             return Faults.CLOSURE;
+        }
+        if (maxClosureError != null && Double.isNaN(outcome.worstClosureError())) {
+            terminal.out().println("No closure error can be given, so that --max-closure-error was not checked.");
         }
         return 0;
     }

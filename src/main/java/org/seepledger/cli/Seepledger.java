@@ -2,6 +2,7 @@ package org.seepledger.cli;
 
 import java.io.Console;
 import java.io.PrintStream;
+import java.io.PrintWriter;
 import java.nio.charset.Charset;
 import java.nio.charset.StandardCharsets;
 import java.util.Locale;
@@ -93,8 +94,8 @@ public final class Seepledger {
                 return CommandLine.defaultFactory().create(type);
             }
         });
-        line.setOut(new java.io.PrintWriter(out, true));
-        line.setErr(new java.io.PrintWriter(err, true));
+        line.setOut(new PrintWriter(out, true));
+        line.setErr(new PrintWriter(err, true));
         line.setCaseInsensitiveEnumValuesAllowed(true);
         line.setUsageHelpWidth(100);
         line.setExecutionExceptionHandler((fault, command, parsed) -> Faults.report(fault, err));
@@ -103,6 +104,10 @@ public final class Seepledger {
             line.usage(out);
             return 2;
         }
-        return line.execute(arguments);
+        try {
+            return line.execute(arguments);
+        } catch (Error e) {
+            return Faults.report(e, err);
+        }
     }
 }

@@ -14,6 +14,7 @@ import org.seepledger.balance.Periods;
 import org.seepledger.balance.WaterBalance;
 import org.seepledger.fault.DataFault;
 import org.seepledger.fault.UsageFault;
+import org.seepledger.io.Unreadable;
 import org.seepledger.io.aquifer.AquiferFolder;
 import org.seepledger.io.aquifer.AquiferReader;
 import org.seepledger.io.prisms.PrismsReader;
@@ -31,6 +32,7 @@ import org.seepledger.ledger.Period;
 import org.seepledger.ledger.PeriodBudget;
 import org.seepledger.prism.Overlaps;
 import org.seepledger.prism.Prism;
+import org.seepledger.prism.VerticalRange;
 import org.seepledger.progress.Progress;
 import org.seepledger.report.BalanceSummary;
 import org.seepledger.report.Figures;
@@ -59,16 +61,15 @@ public final class BalanceJob {
      * @throws DataFault if the data are wrong; nothing is written then
      * @throws org.seepledger.fault.ProgramFault if an identity that must hold does not; nothing is written then
      * @throws org.seepledger.progress.Cancelled if the work was stopped; nothing is written then
-     * @throws IOException if a file cannot be read or written
      */
-    public static BalanceOutcome run(BalanceRequest request, Progress progress) throws IOException {
+    public static BalanceOutcome run(BalanceRequest request, Progress progress) {
         try (OutputFolder out = OutputFolder.at(request.out(), request.overwrite());
                 AquiferFolder folder = AquiferReader.open(request.aquifer())) {
             return new BalanceJob(request, progress).run(folder, out);
         }
     }
 
-    private BalanceOutcome run(AquiferFolder folder, OutputFolder out) throws IOException {
+    private BalanceOutcome run(AquiferFolder folder, OutputFolder out) {
         Aquifer aquifer = folder.aquifer();
         warnings.addAll(folder.warnings());
         notes.addAll(folder.notes());
@@ -92,10 +93,15 @@ public final class BalanceJob {
                 inputs(folder),
                 folder.origins(),
                 warnings);
-        BudgetCsv.write(out.file("budget.csv"), statement, budgets, aquifer.times(), units);
-        FacesGeoJson.write(out.file("faces.geojson"), crs(folder), prisms, records, units);
-        writeImbalance(folder, balance, out);
-        writeRecord(out, statement, balance);
+        try {
+            BudgetCsv.write(out.file("budget.csv"), statement, budgets, aquifer.times(), units);
+            FacesGeoJson.write(out.file("faces.geojson"), crs(folder), prisms, records, units);
+            writeImbalance(folder, balance, out);
+            writeRecord(out, statement, balance);
+        } catch (IOException e) {
+            throw new UsageFault("The results cannot be written beside " + request.out() + " (" + Unreadable.reason(e)
+                    + "). Make room or name another folder.");
+        }
         List<String> files = out.written();
         out.publish();
         String summary = BalanceSummary.of(aquifer, balance, budgets, units, warnings);
@@ -128,7 +134,7 @@ public final class BalanceJob {
                         notes::add)
                 .read(request.prisms(), request.prisms().toString());
         prisms.stream()
-                .filter(prism -> !(prism.range() instanceof org.seepledger.prism.VerticalRange.Layers))
+                .filter(prism -> !(prism.range() instanceof VerticalRange.Layers))
                 .findFirst()
                 .ifPresent(prism -> {
                     throw notYet("prism \"" + prism.name() + "\"");
@@ -162,17 +168,26 @@ public final class BalanceJob {
                 ledger.prism(), periods.stream().map(ledger::budget).toList());
     }
 
-    private List<FileRecord> inputs(AquiferFolder folder) throws IOException {
-        Map<String, Path> files = new LinkedHashMap<>(folder.inputs());
-        files.put(request.prisms().toString(), request.prisms());
-        request.periods().ifPresent(file -> files.put(file.toString(), file));
+    /** A file of the request may have the name of one of the set's: both are listed. */
+    private List<FileRecord> inputs(AquiferFolder folder) {
+        List<Map.Entry<String, Path>> files = new ArrayList<>(folder.inputs().entrySet());
+        files.add(Map.entry(request.prisms().toString(), request.prisms()));
+        request.periods().ifPresent(file -> files.add(Map.entry(file.toString(), file)));
         progress.begin("fingerprinting inputs", files.size());
         List<FileRecord> records = new ArrayList<>();
-        for (Map.Entry<String, Path> file : files.entrySet()) {
-            records.add(FileRecord.of(file.getKey(), file.getValue()));
+        for (Map.Entry<String, Path> file : files) {
+            records.add(fingerprint(file.getKey(), file.getValue()));
             progress.step();
         }
         return records;
+    }
+
+    private static FileRecord fingerprint(String name, Path file) {
+        try {
+            return FileRecord.of(name, file);
+        } catch (IOException e) {
+            throw Unreadable.file(name, e);
+        }
     }
 
     private static Optional<String> crs(AquiferFolder folder) {

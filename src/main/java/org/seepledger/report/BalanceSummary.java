@@ -18,7 +18,8 @@ import org.seepledger.ledger.Ledger;
 import org.seepledger.ledger.PeriodBudget;
 import org.seepledger.ledger.Totals;
 
-/** The summary of a balance on the terminal: first whether it closes, then what dominates, then where it does not. */
+/** The summary of a balance on the terminal: first the warnings, then for each prism
+ * whether it closes, what dominates, and where it does not. */
 public final class BalanceSummary {
 
     private static final int TERMS_SHOWN = 6;
@@ -73,12 +74,12 @@ public final class BalanceSummary {
         text.append(Figures.shown(aquifer.times().instant(0))).append(" to ");
         text.append(Figures.shown(aquifer.times().instant(intervals))).append(' ');
         text.append(aquifer.timeUnit()).append(". Rates are means over the record.\n");
-        for (int prism = 0; prism < prisms; prism++) {
-            writePrism(prism);
-        }
         if (!warnings.isEmpty()) {
             text.append("\nWarnings\n");
             warnings.forEach(warning -> text.append("  - ").append(warning).append('\n'));
+        }
+        for (int prism = 0; prism < prisms; prism++) {
+            writePrism(prism);
         }
         text.append('\n').append(Disclaimer.text()).append('\n');
         return text.toString();
