@@ -63,7 +63,7 @@ public final class JsonFile {
     private static DataFault malformed(JsonProcessingException e, String shownFile) {
         JsonLocation at = e.getLocation();
         String place = at == null ? "" : "line " + at.getLineNr() + ", column " + at.getColumnNr();
-        String what = e.getOriginalMessage();
+        String what = e.getOriginalMessage().replaceAll(", from `[^`]*`", "");
         String found = "a fault in the JSON (" + (what.length() > 300 ? what.substring(0, 300) + "…" : what) + ")";
         String expected = "JSON of at most " + DEEPEST + " levels and " + MOST_TOKENS + " tokens, keys not repeated";
         return new DataFault(shownFile, place, found, expected, "Correct the file there.");

@@ -104,7 +104,7 @@ public final class BalanceJob {
         }
         List<String> files = out.written();
         out.publish();
-        String summary = BalanceSummary.of(aquifer, balance, budgets, units, warnings);
+        String summary = BalanceSummary.of(aquifer, balance, budgets, units, warnings, notes);
         return new BalanceOutcome(summary, worst(budgets), files);
     }
 

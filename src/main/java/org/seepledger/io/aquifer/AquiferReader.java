@@ -111,15 +111,18 @@ public final class AquiferReader {
     }
 
     private Measure measure(String key, String like) {
+        String text = root.get(key).textValue();
+        String expected = "a unit as \"" + like + "\"";
         try {
-            Measure measure = Measure.of(root.get(key).textValue());
+            Measure measure = Measure.of(text);
             if (measure.isCompatible(Measure.of(like))) {
                 return measure;
             }
-            throw new IllegalArgumentException("\"" + measure + "\" is the unit of something else");
         } catch (IllegalArgumentException e) {
-            throw new DataFault(FILE, key, e.getMessage(), "a unit as \"" + like + "\"", "Correct the unit.");
+            String remedy = "Known are " + Measure.choices() + ".";
+            throw new DataFault(FILE, key, "the unknown unit \"" + text + "\"", expected, remedy);
         }
+        throw new DataFault(FILE, key, "\"" + text + "\", the unit of something else", expected, "Correct the unit.");
     }
 
     private Times times() {
@@ -129,7 +132,11 @@ public final class AquiferReader {
             return times;
         } catch (IllegalArgumentException e) {
             throw new DataFault(
-                    FILE, "times", e.getMessage(), "increasing instants", "Sort them and leave repeats out.");
+                    FILE,
+                    "times",
+                    "times that cannot be (" + e.getMessage() + ")",
+                    "increasing instants",
+                    "Sort them and leave repeats out.");
         }
     }
 

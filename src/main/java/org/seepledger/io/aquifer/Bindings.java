@@ -183,7 +183,10 @@ final class Bindings {
             }
             StepKind wanted = band.textValue().equals("interval") ? StepKind.INTERVAL : StepKind.INSTANT;
             if (wanted != steps) {
-                throw fault("the band \"" + band.textValue() + "\"", placeholders(), "Use the right word.");
+                throw fault(
+                        "the band \"" + band.textValue() + "\"",
+                        placeholders().replaceAll("\\{(\\w+)}", "\"$1\"").replace("placeholder", "band"),
+                        "Use the right word.");
             }
             return new BandRule(BandRule.Kind.STEP, 0);
         }
@@ -206,7 +209,10 @@ final class Bindings {
                 try {
                     return Measure.of(text.textValue());
                 } catch (IllegalArgumentException e) {
-                    throw fault(e.getMessage(), "a unit as \"" + target + "\"", "Correct the unit.");
+                    throw fault(
+                            "the unknown unit \"" + text.textValue() + "\"",
+                            "a unit as \"" + target + "\"",
+                            "Known are " + Measure.choices() + ".");
                 }
             });
         }

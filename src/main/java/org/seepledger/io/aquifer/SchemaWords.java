@@ -5,6 +5,7 @@ import com.fasterxml.jackson.databind.JsonNode;
 import com.networknt.schema.ValidationMessage;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.Function;
 import java.util.stream.Collectors;
 import java.util.stream.StreamSupport;
 import org.seepledger.fault.DataFault;
@@ -38,7 +39,11 @@ final class SchemaWords {
             case "additionalProperties" -> unknownKey();
             case "required" ->
                 fault("no \"" + message.getProperty() + "\"", missing(), "Add it; docs/formats.md says what it means.");
-            case "false" -> fault(shown(), "no such key with this kind", "Take it out, or correct the kind.");
+            case "false" ->
+                fault(
+                        "a key that the \"kind\" beside it does not have",
+                        "none here",
+                        "Take it out, or correct the kind.");
             default -> fault(shown(), expected(), REMEDY);
         };
     }
@@ -90,7 +95,12 @@ final class SchemaWords {
     }
 
     private String types() {
-        return rule.isArray() ? words(rule, type -> type(type.textValue()), " or ") : type(rule.textValue());
+        if (!rule.isArray()) {
+            return type(rule.textValue());
+        }
+        String all = words(rule, type -> type(type.textValue()), ", ");
+        int last = all.lastIndexOf(", ");
+        return all.substring(0, last) + " or" + all.substring(last + 1);
     }
 
     private static String type(String name) {
@@ -105,7 +115,7 @@ final class SchemaWords {
         };
     }
 
-    private static String words(JsonNode entries, java.util.function.Function<JsonNode, String> word, String between) {
+    private static String words(JsonNode entries, Function<JsonNode, String> word, String between) {
         return StreamSupport.stream(entries.spliterator(), false).map(word).collect(Collectors.joining(between));
     }
 
