@@ -32,7 +32,9 @@ import picocli.CommandLine.IVersionProvider;
         footer = {
             "",
             "Try it on the sample aquifer:",
-            "  seepledger balance sample-aquifers/terrace --prisms sample-aquifers/terrace/prisms.geojson --out budget",
+            "  seepledger inspect sample-aquifers/terrace",
+            "  seepledger balance sample-aquifers/terrace \\",
+            "    --prisms sample-aquifers/terrace/prisms.geojson --out budget",
             "",
             "Exit status: 0 done; 1 a fault of the program; 2 the command line is wrong; 3 the data are wrong;",
             "4 done, but a closure error exceeds --max-closure-error."

@@ -2,6 +2,7 @@ package org.seepledger.io;
 
 import java.io.IOException;
 import java.nio.file.AccessDeniedException;
+import java.nio.file.FileAlreadyExistsException;
 import java.nio.file.FileSystemException;
 import java.nio.file.NoSuchFileException;
 import org.seepledger.fault.DataFault;
@@ -37,6 +38,9 @@ public final class Unreadable {
         }
         if (cause instanceof NoSuchFileException) {
             return "no such file";
+        }
+        if (cause instanceof FileAlreadyExistsException) {
+            return "a file is in its place";
         }
         String reason = cause instanceof FileSystemException system ? system.getReason() : cause.getMessage();
         return reason == null ? cause.getClass().getSimpleName() : reason;
