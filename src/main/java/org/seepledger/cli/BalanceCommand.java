@@ -1,6 +1,5 @@
 package org.seepledger.cli;
 
-import java.io.IOException;
 import java.nio.file.Path;
 import java.util.Arrays;
 import java.util.Locale;
@@ -28,12 +27,13 @@ import picocli.CommandLine.Parameters;
         sortOptions = false,
         footer = {
             "",
-            "Example: monthly budgets in cubic metres an hour, failing if one leaves more than 1 % unexplained.",
-            "  seepledger balance my-aquifer --prisms prisms.geojson --out budget --every month"
-                    + " --rate-unit m3/h --max-closure-error 1",
+            "Example: the sample's budget in litres a second, failing if more than 1 %% is left unexplained.",
+            "  seepledger balance sample-aquifers/terrace \\",
+            "    --prisms sample-aquifers/terrace/prisms.geojson --out budget \\",
+            "    --rate-unit L/s --max-closure-error 1",
             "",
-            "Written to DIR: budget.csv (the table), faces.geojson (faces with their flow), imbalance_l1.tif … (what does"
-                    + " not balance, by cell), run.json (inputs, options, warnings).",
+            "Written to DIR: budget.csv (the table), faces.geojson (faces with their flow), imbalance_l1.tif"
+                    + " and so on (what does not balance, by cell and layer), run.json (inputs, options, warnings).",
             "Exit status: 0 done; 1 a fault of the program; 2 the command line is wrong; 3 the data are wrong;",
             "4 done, but a closure error exceeds --max-closure-error."
         })
@@ -44,7 +44,11 @@ final class BalanceCommand implements Callable<Integer> {
     @Parameters(paramLabel = "AQUIFER", description = "The folder with aquifer.json.")
     private Path aquifer;
 
-    @Option(names = "--prisms", paramLabel = "F", required = true, description = "The prisms, as GeoJSON.")
+    @Option(
+            names = "--prisms",
+            paramLabel = "F",
+            required = true,
+            description = "The prisms, as GeoJSON: polygons, each with a name.")
     private Path prisms;
 
     @Option(
@@ -64,7 +68,8 @@ final class BalanceCommand implements Callable<Integer> {
                 names = "--every",
                 paramLabel = "PERIOD",
                 description =
-                        "Strike a budget for each interval (default), month, year, water-year, or the whole record.")
+                        "Strike a budget for each interval (default), month, year or water-year, or one for the whole"
+                                + " record.")
         private String every = "interval";
 
         @Option(names = "--periods", paramLabel = "FILE", description = "Or for the periods of a CSV: name,from,to.")
@@ -77,19 +82,22 @@ final class BalanceCommand implements Callable<Integer> {
             description = "The month in which a water year begins, 1 to 12 (default: 10).")
     private int waterYearStart = 10;
 
-    @Option(names = "--rate-unit", paramLabel = "UNIT", description = "Unit of rates, as L/s (default: the set's own).")
+    @Option(
+            names = "--rate-unit",
+            paramLabel = "UNIT",
+            description = "Unit of rates, such as L/s (default: the set's own).")
     private String rateUnit;
 
     @Option(
             names = "--volume-unit",
             paramLabel = "UNIT",
-            description = "Unit of volumes, as ML (default: the set's own).")
+            description = "Unit of volumes, such as ML (default: the set's own).")
     private String volumeUnit;
 
     @Option(
             names = "--mass-unit",
             paramLabel = "UNIT",
-            description = "Unit of masses, as kg; checked, but a water budget has none.")
+            description = "Unit of masses, such as kg; checked, but a water budget has none.")
     private String massUnit;
 
     @Option(
@@ -128,7 +136,7 @@ final class BalanceCommand implements Callable<Integer> {
     }
 
     @Override
-    public Integer call() throws IOException {
+    public Integer call() {
         measure("--mass-unit", massUnit, "kg");
         BalanceOutcome outcome = BalanceJob.run(request(), terminal.progress(progress));
         terminal.out().print(outcome.summary());
@@ -139,6 +147,9 @@ final class BalanceCommand implements Callable<Integer> {
                     .println("The worst closure error is " + outcome.worstClosureError() + " %, more than the "
                             + maxClosureError + " % allowed.");
             return Faults.CLOSURE;
+        }
+        if (maxClosureError != null && Double.isNaN(outcome.worstClosureError())) {
+            terminal.out().println("No closure error can be given, so that --max-closure-error was not checked.");
         }
         return 0;
     }

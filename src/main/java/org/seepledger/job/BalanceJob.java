@@ -13,6 +13,7 @@ import org.seepledger.balance.Balance;
 import org.seepledger.balance.Periods;
 import org.seepledger.balance.WaterBalance;
 import org.seepledger.fault.UsageFault;
+import org.seepledger.io.Unreadable;
 import org.seepledger.io.aquifer.AquiferFolder;
 import org.seepledger.io.aquifer.AquiferReader;
 import org.seepledger.io.prisms.PrismsReader;
@@ -58,22 +59,21 @@ public final class BalanceJob {
      * @throws org.seepledger.fault.DataFault if the data are wrong; nothing is written then
      * @throws org.seepledger.fault.ProgramFault if an identity that must hold does not; nothing is written then
      * @throws org.seepledger.progress.Cancelled if the work was stopped; nothing is written then
-     * @throws IOException if a file cannot be read or written
      */
-    public static BalanceOutcome run(BalanceRequest request, Progress progress) throws IOException {
+    public static BalanceOutcome run(BalanceRequest request, Progress progress) {
         try (OutputFolder out = OutputFolder.at(request.out(), request.overwrite());
                 AquiferFolder folder = AquiferReader.open(request.aquifer())) {
             return new BalanceJob(request, progress).run(folder, out);
         }
     }
 
-    private BalanceOutcome run(AquiferFolder folder, OutputFolder out) throws IOException {
+    private BalanceOutcome run(AquiferFolder folder, OutputFolder out) {
         try (SurfaceRasters surfaces = new SurfaceRasters(folder.aquifer().grid(), notes::add)) {
             return run(folder, surfaces, out);
         }
     }
 
-    private BalanceOutcome run(AquiferFolder folder, SurfaceRasters surfaces, OutputFolder out) throws IOException {
+    private BalanceOutcome run(AquiferFolder folder, SurfaceRasters surfaces, OutputFolder out) {
         Aquifer aquifer = folder.aquifer();
         warnings.addAll(folder.warnings());
         notes.addAll(folder.notes());
@@ -97,14 +97,19 @@ public final class BalanceJob {
                 inputs(folder, surfaces),
                 folder.origins(),
                 warnings);
-        BudgetCsv.write(out.file("budget.csv"), statement, budgets, aquifer.times(), units);
-        ExchangeCsv.write(out.file("exchange.csv"), statement, balance.exchange(), periods, aquifer.times(), units);
-        FacesGeoJson.write(out.file("faces.geojson"), crs(folder), prisms, records, units);
-        writeImbalance(folder, balance, out);
-        writeRecord(out, statement, balance);
+        try {
+            BudgetCsv.write(out.file("budget.csv"), statement, budgets, aquifer.times(), units);
+            ExchangeCsv.write(out.file("exchange.csv"), statement, balance.exchange(), periods, aquifer.times(), units);
+            FacesGeoJson.write(out.file("faces.geojson"), crs(folder), prisms, records, units);
+            writeImbalance(folder, balance, out);
+            writeRecord(out, statement, balance);
+        } catch (IOException e) {
+            throw new UsageFault("The results cannot be written beside " + request.out() + " (" + Unreadable.reason(e)
+                    + "). Make room or name another folder.");
+        }
         List<String> files = out.written();
         out.publish();
-        String summary = BalanceSummary.of(aquifer, balance, budgets, units, warnings);
+        String summary = BalanceSummary.of(aquifer, balance, budgets, units, warnings, notes);
         return new BalanceOutcome(summary, worst(budgets), files);
     }
 
@@ -141,18 +146,27 @@ public final class BalanceJob {
                 ledger.prism(), periods.stream().map(ledger::budget).toList());
     }
 
-    private List<FileRecord> inputs(AquiferFolder folder, SurfaceRasters surfaces) throws IOException {
-        Map<String, Path> files = new LinkedHashMap<>(folder.inputs());
-        files.put(request.prisms().toString(), request.prisms());
-        files.putAll(surfaces.inputs());
-        request.periods().ifPresent(file -> files.put(file.toString(), file));
+    /** A file of the request may have the name of one of the set's: both are listed. */
+    private List<FileRecord> inputs(AquiferFolder folder, SurfaceRasters surfaces) {
+        List<Map.Entry<String, Path>> files = new ArrayList<>(folder.inputs().entrySet());
+        files.add(Map.entry(request.prisms().toString(), request.prisms()));
+        files.addAll(surfaces.inputs().entrySet());
+        request.periods().ifPresent(file -> files.add(Map.entry(file.toString(), file)));
         progress.begin("fingerprinting inputs", files.size());
         List<FileRecord> records = new ArrayList<>();
-        for (Map.Entry<String, Path> file : files.entrySet()) {
-            records.add(FileRecord.of(file.getKey(), file.getValue()));
+        for (Map.Entry<String, Path> file : files) {
+            records.add(fingerprint(file.getKey(), file.getValue()));
             progress.step();
         }
         return records;
+    }
+
+    private static FileRecord fingerprint(String name, Path file) {
+        try {
+            return FileRecord.of(name, file);
+        } catch (IOException e) {
+            throw Unreadable.file(name, e);
+        }
     }
 
     private static Optional<String> crs(AquiferFolder folder) {

@@ -1,8 +1,8 @@
 package org.seepledger.job;
 
-import com.fasterxml.jackson.databind.JsonNode;
 import java.io.IOException;
 import java.io.UncheckedIOException;
+import java.nio.file.AccessDeniedException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
@@ -13,7 +13,7 @@ import java.util.Set;
 import java.util.stream.Stream;
 import org.seepledger.fault.DataFault;
 import org.seepledger.fault.UsageFault;
-import org.seepledger.io.JsonFile;
+import org.seepledger.io.Unreadable;
 import org.seepledger.io.result.RunJson;
 
 /**
@@ -24,11 +24,13 @@ final class OutputFolder implements AutoCloseable {
 
     private final Path target;
     private final Path aside;
+    private final List<Path> made;
     private final Set<String> replaceable;
 
-    private OutputFolder(Path target, Path aside, Set<String> replaceable) {
+    private OutputFolder(Path target, Path aside, List<Path> made, Set<String> replaceable) {
         this.target = target;
         this.aside = aside;
+        this.made = made;
         this.replaceable = replaceable;
     }
 
@@ -44,13 +46,39 @@ final class OutputFolder implements AutoCloseable {
     static OutputFolder at(Path target, boolean overwrite) {
         Path absolute = target.toAbsolutePath().normalize();
         Set<String> replaceable = replaceable(target, overwrite);
+        List<Path> made = missing(absolute.getParent());
         try {
             Files.createDirectories(absolute.getParent());
             String name = "." + absolute.getFileName() + "-building-";
-            return new OutputFolder(absolute, Files.createTempDirectory(absolute.getParent(), name), replaceable);
+            Path aside = Files.createTempDirectory(absolute.getParent(), name);
+            if (Files.isDirectory(absolute) && !Files.isWritable(absolute)) {
+                Files.delete(aside);
+                throw new AccessDeniedException(target.toString());
+            }
+            return new OutputFolder(absolute, aside, made, replaceable);
         } catch (IOException e) {
-            throw new UsageFault("The output folder " + target + " cannot be written beside: " + e.getMessage()
-                    + ". Name a folder where you may write.");
+            removeEmpty(made);
+            throw new UsageFault("The output folder " + target + " cannot be used (" + Unreadable.reason(e)
+                    + "). Name a folder where you may write.");
+        }
+    }
+
+    /** The folders above the target that do not exist yet, the innermost first. */
+    private static List<Path> missing(Path parent) {
+        List<Path> missing = new ArrayList<>();
+        for (Path folder = parent; folder != null && Files.notExists(folder); folder = folder.getParent()) {
+            missing.add(folder);
+        }
+        return missing;
+    }
+
+    private static void removeEmpty(List<Path> folders) {
+        try {
+            for (Path folder : folders) {
+                Files.deleteIfExists(folder);
+            }
+        } catch (IOException inUse) {
+            // Somebody else put something there meanwhile: it stays.
         }
     }
 
@@ -79,16 +107,14 @@ final class OutputFolder implements AutoCloseable {
         Set<String> names = new LinkedHashSet<>();
         names.add(RunJson.NAME);
         try {
-            JsonNode outputs = JsonFile.read(record, record.toString()).path(RunJson.OUTPUTS);
-            outputs.forEach(output -> {
-                String name = output.path("name").asText();
-                if (name.matches("[A-Za-z0-9_.-]+") && !name.startsWith(".")) {
-                    names.add(name);
-                }
-            });
+            RunJson.outputs(record).stream()
+                    .filter(name -> name.matches("[A-Za-z0-9_-][A-Za-z0-9_.-]*"))
+                    .filter(name -> !Files.isDirectory(record.resolveSibling(name)))
+                    .forEach(names::add);
         } catch (DataFault e) {
-            throw new UsageFault("The run record in the output folder cannot be read: " + e.getMessage()
-                    + " Name a new or empty folder.");
+            throw new UsageFault(
+                    "The output folder holds no run record that can be read, so no earlier run's files can be told"
+                            + " apart: " + e.getMessage() + " Name a new or empty folder.");
         }
         return names;
     }
@@ -100,7 +126,8 @@ final class OutputFolder implements AutoCloseable {
         try (Stream<Path> files = Files.list(folder)) {
             return files.map(file -> file.getFileName().toString()).sorted().toList();
         } catch (IOException e) {
-            throw new UsageFault("The output folder " + folder + " cannot be read: " + e.getMessage());
+            throw new UsageFault("The output folder " + folder + " cannot be read (" + Unreadable.reason(e)
+                    + "). Name a folder where you may read and write.");
         }
     }
 
@@ -140,7 +167,8 @@ final class OutputFolder implements AutoCloseable {
                 }
             }
         } catch (IOException e) {
-            throw new UsageFault("The files cannot be moved to " + target + ": " + e.getMessage());
+            throw new UsageFault(
+                    "The files cannot be moved to " + target + " (" + Unreadable.reason(e) + "). Name another folder.");
         }
     }
 
@@ -153,6 +181,9 @@ final class OutputFolder implements AutoCloseable {
             Files.deleteIfExists(aside);
         } catch (IOException e) {
             throw new UncheckedIOException(e);
+        }
+        if (!Files.exists(target)) {
+            removeEmpty(made);
         }
     }
 }

@@ -17,6 +17,8 @@ import org.seepledger.unit.Measure;
 /** Reads the {@code flow} of a set. */
 final class FlowReader {
 
+    private static final String DARCY_FLUX = "darcy_flux";
+    private static final String FACE_FLOW = "face_flow";
     private static final List<String> SHARED = List.of("kind", "at", "origin", "reference", "uncertainty");
     private static final List<String> DARCY = List.of("x", "y", "z", "components", "outer_faces");
     private static final List<String> HEADS =
@@ -49,8 +51,8 @@ final class FlowReader {
                             + " the interval's own mean.");
         }
         return switch (node.get("kind").textValue()) {
-            case "darcy_flux" -> darcyFlux();
-            case "face_flow" -> faceFlow();
+            case DARCY_FLUX -> darcyFlux();
+            case FACE_FLOW -> faceFlow();
             default -> headGradient();
         };
     }
@@ -108,10 +110,14 @@ final class FlowReader {
                         "flow",
                         "\"" + key + "\" with a flow of kind \""
                                 + node.get("kind").textValue() + "\"",
-                        "only " + known,
-                        "Take it out, or correct the kind.");
+                        "one of " + String.join(", ", known),
+                        "It belongs to the kind \"" + kindOf(key) + "\": take it out, or correct the kind.");
             }
         });
+    }
+
+    private static String kindOf(String key) {
+        return DARCY.contains(key) ? DARCY_FLUX : FACES.contains(key) ? FACE_FLOW : "head_gradient";
     }
 
     private Optional<GriddedValues> vertical(String key, Measure unit) {

@@ -1,9 +1,9 @@
 package org.seepledger.io.aquifer;
 
 import java.io.IOException;
-import java.io.UncheckedIOException;
 import org.seepledger.aquifer.GriddedValues;
 import org.seepledger.aquifer.Window;
+import org.seepledger.io.Unreadable;
 import org.seepledger.io.raster.GeoTiff;
 
 /**
@@ -23,7 +23,7 @@ record RasterValues(DataFiles files, String name, BandRule band, Conversion conv
             raster.readStored(index, window, target, offset);
             conversion.apply(raster.scale(index), raster.offset(index), target, offset, window.size());
         } catch (IOException e) {
-            throw new UncheckedIOException(e);
+            throw Unreadable.file(FileName.of(name, layer, step), e);
         }
     }
 
