@@ -23,7 +23,10 @@ final class Tally {
         inactiveArea = new Sums(layers);
     }
 
-    /** Books a flow through a boundary piece whose outflow density goes from start to end: in and out apart. */
+    /**
+     * Books a flow through a boundary piece whose outflow density goes from start to end: in and out apart, and the same
+     * to the last bit seen from the other side.
+     */
     void throughPiece(int account, double start, double end) {
         double net = 0.5 * (start + end);
         routes.add(FACES, net);
@@ -32,9 +35,8 @@ final class Tally {
         } else if (start <= 0 && end <= 0) {
             inflow.add(account, -net);
         } else {
-            double turn = start / (start - end);
-            double before = 0.5 * start * turn;
-            double after = 0.5 * end * (1 - turn);
+            double before = 0.5 * start * (start / (start - end));
+            double after = 0.5 * end * (end / (end - start));
             outflow.add(account, Math.max(before, after));
             inflow.add(account, -Math.min(before, after));
         }

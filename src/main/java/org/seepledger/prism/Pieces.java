@@ -139,8 +139,8 @@ public final class Pieces {
      * @param north through its north face
      */
     public double outflowAtStart(int piece, double west, double east, double south, double north) {
-        return (west + (east - west) * startAcross[piece]) * up(piece)
-                - (south + (north - south) * startUp[piece]) * across(piece);
+        return between(west, east, startAcross[piece]) * up(piece)
+                - between(south, north, startUp[piece]) * across(piece);
     }
 
     /**
@@ -153,8 +153,12 @@ public final class Pieces {
      * @param north through its north face
      */
     public double outflowAtEnd(int piece, double west, double east, double south, double north) {
-        return (west + (east - west) * endAcross[piece]) * up(piece)
-                - (south + (north - south) * endUp[piece]) * across(piece);
+        return between(west, east, endAcross[piece]) * up(piece) - between(south, north, endUp[piece]) * across(piece);
+    }
+
+    /** Flow between two faces, exactly a face's own on it, so that the cells on both sides of a face agree. */
+    private static double between(double first, double second, double place) {
+        return (1 - place) * first + place * second;
     }
 
     /**
