@@ -1,5 +1,6 @@
 package org.seepledger.cli;
 
+import java.nio.charset.StandardCharsets;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.junit.jupiter.api.Assumptions.assumeTrue;
 
@@ -44,7 +45,7 @@ class OutputFolderTest {
                         file.getFileName().toString(),
                         Files.isDirectory(file)
                                 ? "folder"
-                                : Files.readString(file, java.nio.charset.StandardCharsets.ISO_8859_1));
+                                : Files.readString(file, StandardCharsets.ISO_8859_1));
             }
         }
         return contents;

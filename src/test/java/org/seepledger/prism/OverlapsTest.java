@@ -1,5 +1,6 @@
 package org.seepledger.prism;
 
+import java.util.Arrays;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.util.List;
@@ -101,7 +102,7 @@ class OverlapsTest {
         GriddedValues surface = new GriddedValues() {
             @Override
             public void read(int layer, int step, Window window, double[] target, int offset) {
-                java.util.Arrays.fill(target, offset, offset + window.size(), 5);
+                Arrays.fill(target, offset, offset + window.size(), 5);
                 if (window.contains(row, column)) {
                     target[offset + window.index(row, column)] = 25;
                 }

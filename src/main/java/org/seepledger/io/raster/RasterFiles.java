@@ -1,5 +1,6 @@
 package org.seepledger.io.raster;
 
+import java.io.UncheckedIOException;
 import java.io.Closeable;
 import java.io.IOException;
 import java.nio.file.Path;
@@ -69,7 +70,7 @@ public final class RasterFiles implements Closeable {
             try {
                 raster.close();
             } catch (IOException e) {
-                throw new java.io.UncheckedIOException(e);
+                throw new UncheckedIOException(e);
             }
         }
     }

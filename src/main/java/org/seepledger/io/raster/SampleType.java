@@ -1,5 +1,6 @@
 package org.seepledger.io.raster;
 
+import java.util.Locale;
 import java.nio.ByteBuffer;
 import java.util.Arrays;
 import java.util.Optional;
@@ -65,6 +66,6 @@ enum SampleType {
 
     @Override
     public String toString() {
-        return name().toLowerCase(java.util.Locale.ROOT);
+        return name().toLowerCase(Locale.ROOT);
     }
 }

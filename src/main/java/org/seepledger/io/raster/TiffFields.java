@@ -1,5 +1,6 @@
 package org.seepledger.io.raster;
 
+import java.util.Arrays;
 import java.nio.ByteBuffer;
 import java.nio.ByteOrder;
 import java.nio.charset.StandardCharsets;
@@ -89,7 +90,7 @@ final class TiffFields {
             bytes.putShort((short) (int) entry.getKey()).putShort((short) field.type);
             place(bytes, field.count);
             if (bytesOutside(field) == 0) {
-                bytes.put(java.util.Arrays.copyOf(field.values, placeBytes()));
+                bytes.put(Arrays.copyOf(field.values, placeBytes()));
             } else {
                 place(bytes, position + outside);
                 bytes.put(outside, field.values);
