@@ -36,9 +36,15 @@ final class TransientCase {
     final RandomCase base;
     final Random random;
     final Aquifer aquifer;
+    private final int mostWells;
     private final int columns;
 
     TransientCase(long seed) {
+        this(seed, 5);
+    }
+
+    TransientCase(long seed, int mostWells) {
+        this.mostWells = mostWells;
         base = new RandomCase(seed);
         random = base.random;
         columns = base.grid.columns();
@@ -143,7 +149,7 @@ final class TransientCase {
     /** Wells with screens over all layers, and schedules that begin or end within intervals. */
     private List<Well> wells() {
         List<PointRate> lines = new ArrayList<>();
-        for (int i = 0; i < random.nextInt(5); i++) {
+        for (int i = 0; i < random.nextInt(mostWells); i++) {
             double x = base.place(base.grid.x());
             double y = base.place(base.grid.y());
             lines.add(new PointRate(

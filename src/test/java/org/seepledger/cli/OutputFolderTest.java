@@ -1,10 +1,10 @@
 package org.seepledger.cli;
 
-import java.nio.charset.StandardCharsets;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.junit.jupiter.api.Assumptions.assumeTrue;
 
 import java.io.IOException;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Map;
@@ -19,7 +19,7 @@ import org.junit.jupiter.params.provider.ValueSource;
 class OutputFolderTest {
 
     private static final String[] FILES = {
-        "budget.csv", "faces.geojson", "imbalance_l1.tif", "imbalance_l2.tif", "run.json"
+        "budget.csv", "exchange.csv", "faces.geojson", "imbalance_l1.tif", "imbalance_l2.tif", "run.json"
     };
 
     @TempDir
@@ -43,9 +43,7 @@ class OutputFolderTest {
             for (Path file : files.toList()) {
                 contents.put(
                         file.getFileName().toString(),
-                        Files.isDirectory(file)
-                                ? "folder"
-                                : Files.readString(file, StandardCharsets.ISO_8859_1));
+                        Files.isDirectory(file) ? "folder" : Files.readString(file, StandardCharsets.ISO_8859_1));
             }
         }
         return contents;
@@ -158,6 +156,7 @@ class OutputFolderTest {
                 .containsExactly(
                         "budget.csv",
                         "drawings",
+                        "exchange.csv",
                         "faces.geojson",
                         "imbalance_l1.tif",
                         "imbalance_l2.tif",
@@ -172,7 +171,7 @@ class OutputFolderTest {
         succeeded(files.balance());
         succeeded(files.with("layers", "[{'top': 10, 'bottom': 0}]").balance("--overwrite"));
         assertThat(AquiferFiles.names(files.out()))
-                .containsExactly("budget.csv", "faces.geojson", "imbalance_l1.tif", "run.json");
+                .containsExactly("budget.csv", "exchange.csv", "faces.geojson", "imbalance_l1.tif", "run.json");
     }
 
     @Test

@@ -1,8 +1,8 @@
 package org.seepledger.prism;
 
-import java.util.Arrays;
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;

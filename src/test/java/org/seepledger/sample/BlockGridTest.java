@@ -1,8 +1,8 @@
 package org.seepledger.sample;
 
-import java.util.stream.IntStream;
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
 
 class BlockGridTest {

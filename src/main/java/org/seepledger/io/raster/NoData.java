@@ -1,6 +1,7 @@
 package org.seepledger.io.raster;
 
 import java.util.Locale;
+
 /**
  * Which stored values mean that there is none.
  *

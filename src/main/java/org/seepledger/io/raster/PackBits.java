@@ -1,6 +1,7 @@
 package org.seepledger.io.raster;
 
 import java.util.Arrays;
+
 /** Run lengths of bytes (TIFF 6.0, section 9). */
 final class PackBits {
 

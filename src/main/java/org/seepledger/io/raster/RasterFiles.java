@@ -1,8 +1,8 @@
 package org.seepledger.io.raster;
 
-import java.io.UncheckedIOException;
 import java.io.Closeable;
 import java.io.IOException;
+import java.io.UncheckedIOException;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.Iterator;

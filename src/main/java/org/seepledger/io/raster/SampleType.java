@@ -1,8 +1,8 @@
 package org.seepledger.io.raster;
 
-import java.util.Locale;
 import java.nio.ByteBuffer;
 import java.util.Arrays;
+import java.util.Locale;
 import java.util.Optional;
 
 /** What one stored value is. All but 64-bit integers, which a double cannot hold exactly. */
