@@ -110,11 +110,7 @@ class PinchedOutLayerTest {
     void itsAreaIsReported() {
         Aquifer aquifer = AquiferDraft.on(GRID).layers(9, 5, 5, 2).done();
         Balance balance = WaterBalance.of(
-                aquifer,
-                List.of(Prisms.of("a", 0, 2, Shapes.box(3, 2, 7.5, 6))),
-                WellRule.POINT,
-                1,
-                Progress.NONE);
+                aquifer, List.of(Prisms.of("a", 0, 2, Shapes.box(3, 2, 7.5, 6))), WellRule.POINT, 1, Progress.NONE);
         assertThat(balance.notes().inactive()).containsExactly(new RunNotes.InactiveArea("a", 1, 18));
     }
 }

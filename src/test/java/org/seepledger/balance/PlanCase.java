@@ -67,8 +67,7 @@ record PlanCase(
             double share = 0.6 + 0.4 * dice.nextDouble();
             double localX = eighths(0.5 * last(x) * (1 + share * Math.cos(angle)));
             double localY = eighths(0.5 * last(y) * (1 + share * Math.sin(angle)));
-            outline.add(
-                    rotation == 90 ? new double[] {-localY, localX} : new double[] {localX, localY});
+            outline.add(rotation == 90 ? new double[] {-localY, localX} : new double[] {localX, localY});
         }
         List<String> items =
                 IntStream.range(0, corners).mapToObj(i -> "side of " + i).toList();
@@ -104,9 +103,7 @@ record PlanCase(
     /** The outline turned by quarters about the origin, then moved. */
     private List<double[]> moved(int quarters, double dx, double dy) {
         return outline.stream()
-                .map(v -> quarters == 0
-                        ? new double[] {v[0] + dx, v[1] + dy}
-                        : new double[] {-v[1] + dx, v[0] + dy})
+                .map(v -> quarters == 0 ? new double[] {v[0] + dx, v[1] + dy} : new double[] {-v[1] + dx, v[0] + dy})
                 .toList();
     }
 

@@ -55,8 +55,7 @@ class SymmetryTest {
     private static void assertSame(PlanCase one, PlanCase other) {
         BudgetReading expected = other.reading();
         for (Entry entry : one.reading().budget().entries()) {
-            Entry same = expected.entry(
-                    entry.account().item(), entry.account().layer());
+            Entry same = expected.entry(entry.account().item(), entry.account().layer());
             assertThat(entry.inflow()).isEqualTo(same.inflow(), within(ROUNDING));
             assertThat(entry.outflow()).isEqualTo(same.outflow(), within(ROUNDING));
         }

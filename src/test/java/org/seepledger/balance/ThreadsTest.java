@@ -105,7 +105,11 @@ class ThreadsTest {
                 .source(new Source.Areal("recharge", broken))
                 .done();
         assertThatThrownBy(() -> WaterBalance.of(
-                        aquifer, List.of(Prisms.of("a", 0, 0, Shapes.box(1, 1, 3, 30))), WellRule.POINT, 2, Progress.NONE))
+                        aquifer,
+                        List.of(Prisms.of("a", 0, 0, Shapes.box(1, 1, 3, 30))),
+                        WellRule.POINT,
+                        2,
+                        Progress.NONE))
                 .isInstanceOf(IllegalStateException.class)
                 .hasMessage("unreadable");
     }

@@ -31,9 +31,7 @@ class VerticalLeakageTest {
     private static Aquifer aquifer(int cells) {
         Grid grid = new Grid(Axis.even(0, 160.0 / cells, cells), Axis.even(0, 160.0 / cells, cells), 0, 1);
         GriddedValues up = new FormulaValues(
-                grid,
-                1,
-                (step, layer, x, y) -> layer == 0 ? 0 : LEAKANCE * lowerMinusUpper(x, y) * grid.area(0, 0));
+                grid, 1, (step, layer, x, y) -> layer == 0 ? 0 : LEAKANCE * lowerMinusUpper(x, y) * grid.area(0, 0));
         GriddedValues none = GriddedValues.constant(0);
         return AquiferDraft.on(grid)
                 .layers(40, 30, 28, 22, 10)

@@ -31,13 +31,19 @@ class WellFieldsTest {
 
     private static Aquifer aquifer(int cells, boolean leaky, double leakage) {
         Grid grid = new Grid(Axis.even(0, 2 * CENTRE / cells, cells), Axis.even(0, 2 * CENTRE / cells, cells), 0, 1);
-        FormulaValues x = FormulaValues.steady(grid, (east, north) -> component(east - CENTRE, north - CENTRE, leaky, leakage));
-        FormulaValues y = FormulaValues.steady(grid, (east, north) -> component(north - CENTRE, east - CENTRE, leaky, leakage));
-        FormulaValues z = FormulaValues.steady(grid, (east, north) -> leaky
-                ? -RATE / (2 * Math.PI * leakage * leakage) * bessel(0, Math.hypot(east - CENTRE, north - CENTRE) / leakage)
-                : 0);
-        PointRate pump = new PointRate(
-                "P", "pumping", CENTRE, CENTRE, new Screen.InLayer(0), 0, 1, -RATE, "wells.csv, line 2");
+        FormulaValues x =
+                FormulaValues.steady(grid, (east, north) -> component(east - CENTRE, north - CENTRE, leaky, leakage));
+        FormulaValues y =
+                FormulaValues.steady(grid, (east, north) -> component(north - CENTRE, east - CENTRE, leaky, leakage));
+        FormulaValues z = FormulaValues.steady(
+                grid,
+                (east, north) -> leaky
+                        ? -RATE
+                                / (2 * Math.PI * leakage * leakage)
+                                * bessel(0, Math.hypot(east - CENTRE, north - CENTRE) / leakage)
+                        : 0);
+        PointRate pump =
+                new PointRate("P", "pumping", CENTRE, CENTRE, new Screen.InLayer(0), 0, 1, -RATE, "wells.csv, line 2");
         return AquiferDraft.on(grid)
                 .layers(THICKNESS, 0)
                 .flow(new DarcyFlux(x, y, Optional.of(z), false, new OuterFaces(true, true, false)))
@@ -75,7 +81,8 @@ class WellFieldsTest {
 
     @Test
     void theNearSideOfASquareTakesMoreThanTheFarOne() {
-        BudgetReading far = BudgetReading.of(aquifer(96, false, 0), Prisms.of("far", 0, 0, Shapes.box(300, 200, 380, 280)));
+        BudgetReading far =
+                BudgetReading.of(aquifer(96, false, 0), Prisms.of("far", 0, 0, Shapes.box(300, 200, 380, 280)));
         // Seen from the well the near side spans 2 atan(40/60), the far one 2 atan(40/140) of the whole way round.
         double near = RATE * 2 * Math.atan2(40, 60) / (2 * Math.PI);
         double away = RATE * 2 * Math.atan2(40, 140) / (2 * Math.PI);
@@ -99,7 +106,8 @@ class WellFieldsTest {
             Aquifer aquifer = aquifer(24 << level, true, leakage);
             Prism circle = Prisms.of("circle", 0, 0, Shapes.round(CENTRE, CENTRE, radius, 720));
             BudgetReading budget = BudgetReading.of(aquifer, circle);
-            double sides = budget.totals().inflow() - budget.totals().outflow() - budget.net("top") - budget.net("pumping");
+            double sides =
+                    budget.totals().inflow() - budget.totals().outflow() - budget.net("top") - budget.net("pumping");
             errors[0][level] = sides - exact;
             errors[1][level] = budget.in("top") - (RATE - exact);
             assertThat(sides).isEqualTo(exact, within(0.01 * RATE));
