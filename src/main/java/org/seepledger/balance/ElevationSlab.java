@@ -110,7 +110,7 @@ final class ElevationSlab implements Slab {
     }
 
     @Override
-    public void bookLids(int row, int column, double share, Tally tally) {
+    public void bookLids(int row, int column, double share, Bookings bookings) {
         double top = elevations.top(row, column);
         double bottom = elevations.bottom(row, column);
         if (top <= bottom) {
@@ -119,8 +119,8 @@ final class ElevationSlab implements Slab {
         int upper = layerAt(row, column, top, true);
         int lower = layerAt(row, column, bottom, false);
         if (upper >= 0 && lower >= 0 && upper <= lower) {
-            tally.throughFace(chart.top(upper), share * upward(upper, row, column, top));
-            tally.throughFace(chart.bottom(lower), -share * upward(lower, row, column, bottom));
+            bookings.throughFace(chart.top(upper), share * upward(upper, row, column, top));
+            bookings.throughFace(chart.bottom(lower), -share * upward(lower, row, column, bottom));
         }
     }
 
@@ -145,28 +145,28 @@ final class ElevationSlab implements Slab {
     }
 
     @Override
-    public void bookRisers(int row, int column, Tally tally) {
+    public void bookRisers(int row, int column, Bookings bookings) {
         double toWest = coverage.westFace(row, column);
         double toNorth = coverage.northFace(row, column);
         for (int layer = chart.first(); layer <= chart.last(); layer++) {
-            if (toWest != 0) {
+            if (toWest != 0 && column > 0) {
                 double flow = toWest * flows.x()[block.xFace(layer, row, column)];
-                bookRiser(layer, flow, row, column - 1, row, column, tally);
+                bookRiser(layer, flow, row, column - 1, row, column, bookings);
             }
-            if (toNorth != 0) {
+            if (toNorth != 0 && row > 0) {
                 double flow = toNorth * flows.y()[block.yFace(layer, row, column)];
-                bookRiser(layer, flow, row, column, row - 1, column, tally);
+                bookRiser(layer, flow, row, column, row - 1, column, bookings);
             }
         }
     }
 
     /** Books a flow from one cell to its neighbour, as far as it leaves or enters the prism through a step. */
-    private void bookRiser(int layer, double flow, int row, int column, int nextRow, int nextColumn, Tally tally) {
-        if (flow == 0) {
-            return;
-        }
+    private void bookRiser(int layer, double flow, int row, int column, int nextRow, int nextColumn, Bookings bookings) {
         int cell = block.cell(layer, row, column);
         int next = block.cell(layer, nextRow, nextColumn);
+        if (!flows.active()[cell] || !flows.active()[next]) {
+            return;
+        }
         double low = low(cell, row, column);
         double high = high(cell, row, column);
         double nextLow = low(next, nextRow, nextColumn);
@@ -174,10 +174,10 @@ final class ElevationSlab implements Slab {
         double throughTop = Math.max(high, nextLow) - Math.max(nextHigh, low);
         double throughBottom = Math.min(nextLow, high) - Math.min(low, nextHigh);
         if (throughTop != 0) {
-            tally.throughFace(chart.top(layer), flow * throughTop);
+            bookings.throughFace(chart.top(layer), flow * throughTop);
         }
         if (throughBottom != 0) {
-            tally.throughFace(chart.bottom(layer), flow * throughBottom);
+            bookings.throughFace(chart.bottom(layer), flow * throughBottom);
         }
     }
 }

@@ -24,14 +24,14 @@ record LayerSlab(Chart chart, IntervalState state) implements Slab {
     }
 
     @Override
-    public void bookLids(int row, int column, double share, Tally tally) {
+    public void bookLids(int row, int column, double share, Bookings bookings) {
         if (isOpen(row, column)) {
             FaceFlows flows = state.flows();
             Block block = flows.block();
             double up = flows.z()[block.zFace(chart.first(), row, column)];
             double upFromBelow = flows.z()[block.zFace(chart.last() + 1, row, column)];
-            tally.throughFace(chart.top(chart.first()), share * up);
-            tally.throughFace(chart.bottom(chart.last()), -share * upFromBelow);
+            bookings.throughFace(chart.top(chart.first()), share * up);
+            bookings.throughFace(chart.bottom(chart.last()), -share * upFromBelow);
         }
     }
 
@@ -46,7 +46,7 @@ record LayerSlab(Chart chart, IntervalState state) implements Slab {
     }
 
     @Override
-    public void bookRisers(int row, int column, Tally tally) {
+    public void bookRisers(int row, int column, Bookings bookings) {
         // Whole layers have no steps: what flows from cell to cell stays inside.
     }
 }

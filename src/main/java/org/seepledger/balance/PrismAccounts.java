@@ -58,11 +58,11 @@ final class PrismAccounts {
     }
 
     /** Books what one band of rows holds of the prism in one interval. */
-    void book(IntervalState state, Optional<Elevations> elevations, Tally tally) {
+    void book(IntervalState state, Optional<Elevations> elevations, Bookings bookings) {
         Slab slab = elevations
                 .<Slab>map(between -> new ElevationSlab(chart, cut.coverage(), between, state))
                 .orElseGet(() -> new LayerSlab(chart, state));
-        bookPieces(state, slab, tally);
+        bookPieces(state, slab, bookings);
         Window rows = state.geometry().inner();
         Coverage coverage = cut.coverage();
         int from = Math.max(rows.row(), coverage.window().row());
@@ -71,16 +71,17 @@ final class PrismAccounts {
             for (int column = coverage.firstColumn(row); column < coverage.columnEnd(row); column++) {
                 double share = coverage.share(row, column);
                 if (share != 0) {
-                    slab.bookLids(row, column, share, tally);
-                    slab.bookRisers(row, column, tally);
-                    bookCells(state, slab, row, column, share, tally);
+                    bookings.at(row, column);
+                    slab.bookLids(row, column, share, bookings);
+                    slab.bookRisers(row, column, bookings);
+                    bookCells(state, slab, row, column, share, bookings);
                 }
             }
         }
-        bookWells(state, slab, tally);
+        bookWells(state, slab, bookings);
     }
 
-    private void bookPieces(IntervalState state, Slab slab, Tally tally) {
+    private void bookPieces(IntervalState state, Slab slab, Bookings bookings) {
         FaceFlows flows = state.flows();
         Block block = flows.block();
         Pieces pieces = cut.pieces();
@@ -90,6 +91,7 @@ final class PrismAccounts {
             int row = pieces.row(piece);
             int column = pieces.column(piece);
             double[] extra = carried.get(piece);
+            bookings.at(row, column);
             for (int layer = chart.first(); layer <= chart.last(); layer++) {
                 double west = flows.x()[block.xFace(layer, row, column)];
                 double east = flows.x()[block.xFace(layer, row, column + 1)];
@@ -97,7 +99,7 @@ final class PrismAccounts {
                 double north = flows.y()[block.yFace(layer, row, column)];
                 double more = extra == null ? 0 : extra[layer - chart.first()];
                 double part = slab.part(layer, row, column);
-                tally.throughPiece(
+                bookings.throughPiece(
                         chart.side(cut.item(pieces.side(piece)), layer),
                         part * (pieces.outflowAtStart(piece, west, east, south, north) + more),
                         part * (pieces.outflowAtEnd(piece, west, east, south, north) + more));
@@ -124,34 +126,35 @@ final class PrismAccounts {
         return carried;
     }
 
-    private void bookCells(IntervalState state, Slab slab, int row, int column, double share, Tally tally) {
+    private void bookCells(IntervalState state, Slab slab, int row, int column, double share, Bookings bookings) {
         FaceFlows flows = state.flows();
         for (int layer = chart.first(); layer <= chart.last(); layer++) {
             int cell = flows.block().cell(layer, row, column);
             if (!flows.active()[cell]) {
-                tally.inactive(
+                bookings.inactive(
                         layer - chart.first(), share * state.geometry().grid().area(row, column));
                 continue;
             }
-            tally.fromVolume(share * slab.outflow(layer, row, column), flows.gross(layer, row, column));
+            bookings.fromVolume(share * slab.outflow(layer, row, column), flows.gross(layer, row, column));
             for (CellTerm term : state.terms()) {
                 int account = term.storage() ? chart.storage(term.item(), layer) : chart.source(term.item(), layer);
                 double counted = share * slab.counted(term.entry(), layer, row, column);
-                tally.added(account, counted * term.rates()[cell]);
+                bookings.added(account, counted * term.rates()[cell]);
             }
         }
     }
 
-    private void bookWells(IntervalState state, Slab slab, Tally tally) {
+    private void bookWells(IntervalState state, Slab slab, Bookings bookings) {
         for (WellRate rate : state.wells()) {
             WellCut met = wells.get(rate.well());
             if (!chart.holds(rate.layer())) {
                 continue;
             }
+            bookings.at(rate.well().row(), rate.well().column());
             double counted = rule == WellRule.SPREAD ? met.share() : met.inside() ? 1 : 0;
             double part = slab.part(rate.layer(), rate.well().row(), rate.well().column());
-            tally.added(chart.source(rate.well().well().category(), rate.layer()), counted * part * rate.rate());
-            tally.fromVolume(
+            bookings.added(chart.source(rate.well().well().category(), rate.layer()), counted * part * rate.rate());
+            bookings.fromVolume(
                     part * (counted - met.share()) * rate.rate(), met.pieces().length == 0 ? 0 : Math.abs(rate.rate()));
         }
     }

@@ -15,8 +15,8 @@ interface Slab {
     double outflow(int layer, int row, int column);
 
     /** Books what crosses the lids in a column of cells that the prism covers by a share. */
-    void bookLids(int row, int column, double share, Tally tally);
+    void bookLids(int row, int column, double share, Bookings bookings);
 
     /** Books what crosses the steps of lids between a cell and its western and northern neighbours. */
-    void bookRisers(int row, int column, Tally tally);
+    void bookRisers(int row, int column, Bookings bookings);
 }
