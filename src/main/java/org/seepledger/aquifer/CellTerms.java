@@ -44,10 +44,12 @@ final class CellTerms {
         StorageRelease release =
                 new StorageRelease(geometry, saturation, aquifer.times().length(interval));
         List<GivenTerm> terms = new ArrayList<>();
-        aquifer.storage().specificYield().ifPresent(yield -> terms.add(new GivenTerm(yield, values -> {
-            double[] rates = release.waterTable(values, active);
-            return released(Aquifer.WATER_TABLE_STORAGE, CellTerm.Entry.WHERE_IT_PASSES, rates);
-        })));
+        aquifer.storage()
+                .specificYield()
+                .ifPresent(yield -> terms.add(new GivenTerm(yield, values -> {
+                    double[] rates = release.waterTable(values, active);
+                    return released(Aquifer.WATER_TABLE_STORAGE, CellTerm.Entry.WHERE_IT_PASSES, rates);
+                })));
         boolean perLength = aquifer.storage().specificStorage().isPresent();
         terms.add(new GivenTerm(aquifer.storage().elastic(), values -> {
             double[] rates = release.elastic(values, perLength, active);

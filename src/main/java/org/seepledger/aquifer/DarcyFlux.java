@@ -57,12 +57,7 @@ public record DarcyFlux(
     }
 
     private FaceFlows flows(
-            double[] qx,
-            double[] qy,
-            double[] qz,
-            CellGeometry geometry,
-            Saturation saturation,
-            boolean[] active) {
+            double[] qx, double[] qy, double[] qz, CellGeometry geometry, Saturation saturation, boolean[] active) {
         Block block = geometry.block();
         if (mapComponents) {
             turn(qx, qy, geometry.grid());

@@ -65,10 +65,7 @@ record DrivingHead(GriddedValues head, List<Layer> layers, boolean mean) impleme
         List<Stored> parts = new ArrayList<>();
         given.forEach(part -> parts.add(part.where(dry, false)));
         given.stream().limit(1).forEach(part -> parts.add(part.where(dry, true).times(0)));
-        layers.get(layer)
-                .bottom()
-                .stored(layer, 0, window)
-                .forEach(part -> parts.add(part.where(dry, true)));
+        layers.get(layer).bottom().stored(layer, 0, window).forEach(part -> parts.add(part.where(dry, true)));
         return parts;
     }
 }

@@ -49,7 +49,8 @@ public record GivenFaceFlow(
     }
 
     List<GriddedValues> drivers() {
-        return Stream.concat(Stream.of(east, north), Stream.of(up, west, south, down).flatMap(Optional::stream))
+        return Stream.concat(
+                        Stream.of(east, north), Stream.of(up, west, south, down).flatMap(Optional::stream))
                 .toList();
     }
 

@@ -59,8 +59,7 @@ public record HeadGradient(
     @Override
     public LinearFlow linear(int interval, CellGeometry geometry, Saturation saturation, boolean[] active) {
         Conductivities conductivities = conductivities(interval, geometry);
-        GradientFaces faces =
-                new GradientFaces(geometry, saturation, heads(saturation, geometry.block()), active);
+        GradientFaces faces = new GradientFaces(geometry, saturation, heads(saturation, geometry.block()), active);
         return heads -> flows(conductivities, faces.drivenBy(heads[0]), geometry, active);
     }
 
@@ -86,8 +85,7 @@ public record HeadGradient(
         new VerticalFaces(geometry, active)
                 .fill(
                         flows.z(),
-                        (above, below, row, column) ->
-                                faces.upward(conductivities.upward, above, below, row, column));
+                        (above, below, row, column) -> faces.upward(conductivities.upward, above, below, row, column));
         return flows;
     }
 
@@ -95,8 +93,7 @@ public record HeadGradient(
     private double[] heads(Saturation saturation, Block block) {
         double[] heads = new double[block.size()];
         for (int cell = 0; cell < heads.length; cell++) {
-            heads[cell] =
-                    meanHeads ? 0.5 * (saturation.start(cell) + saturation.end(cell)) : saturation.end(cell);
+            heads[cell] = meanHeads ? 0.5 * (saturation.start(cell) + saturation.end(cell)) : saturation.end(cell);
         }
         return heads;
     }

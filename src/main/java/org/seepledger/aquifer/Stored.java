@@ -49,6 +49,21 @@ public record Stored(String file, String place, boolean everywhere, double[] val
         return new Stored(file, place, everywhere, values, factor * share);
     }
 
+    /**
+     * {@return a number that is added wherever this part has a value}
+     *
+     * @param addedFile its file
+     * @param addedPlace where in the file
+     * @param number the number
+     * @param itsFactor by what it is multiplied
+     */
+    public Stored beside(String addedFile, String addedPlace, double number, double itsFactor) {
+        double[] added = Arrays.stream(values)
+                .map(value -> Double.isNaN(value) ? value : number)
+                .toArray();
+        return new Stored(addedFile, addedPlace, true, added, itsFactor);
+    }
+
     /** The part in some of the cells alone. */
     Stored where(boolean[] cells, boolean wanted) {
         double[] some = values.clone();

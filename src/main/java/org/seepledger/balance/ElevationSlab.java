@@ -161,7 +161,8 @@ final class ElevationSlab implements Slab {
     }
 
     /** Books a flow from one cell to its neighbour, as far as it leaves or enters the prism through a step. */
-    private void bookRiser(int layer, double flow, int row, int column, int nextRow, int nextColumn, Bookings bookings) {
+    private void bookRiser(
+            int layer, double flow, int row, int column, int nextRow, int nextColumn, Bookings bookings) {
         int cell = block.cell(layer, row, column);
         int next = block.cell(layer, nextRow, nextColumn);
         if (!flows.active()[cell] || !flows.active()[next]) {

@@ -7,6 +7,7 @@ import org.seepledger.aquifer.CellGeometry;
 import org.seepledger.aquifer.PlacedWell;
 import org.seepledger.aquifer.Response;
 import org.seepledger.aquifer.Window;
+import org.seepledger.ledger.Account;
 import org.seepledger.ledger.Period;
 import org.seepledger.prism.Prism;
 import org.seepledger.prism.PrismCut;
@@ -97,6 +98,17 @@ public final class Trace {
         }
         trace.weights.giveOutNumbers();
         return trace.weights.sum();
+    }
+
+    /**
+     * {@return the accounts that a prism's budget has, in the order of rows}
+     *
+     * @param aquifer the aquifer
+     * @param prism the prism
+     * @throws org.seepledger.fault.DataFault if the prism lies in no layer
+     */
+    public static List<Account> accounts(Aquifer aquifer, Prism prism) {
+        return new Chart(aquifer, PrismCut.of(prism, aquifer.grid())).accounts();
     }
 
     private void trace(Window band, Period period, double rateFactor, Progress progress) {

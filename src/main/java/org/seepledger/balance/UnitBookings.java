@@ -49,9 +49,8 @@ final class UnitBookings {
             for (int layer = 0; layer < layers && (flow || !given.flow()); layer++) {
                 double[] found = given.flow() ? acrossColumns(input, layer) : withinColumns(input, layer);
                 if (Arrays.stream(found).anyMatch(weight -> weight != 0)) {
-                    double[] shared = Arrays.stream(found)
-                            .map(weight -> weight * share)
-                            .toArray();
+                    double[] shared =
+                            Arrays.stream(found).map(weight -> weight * share).toArray();
                     weights.add(given.values().stored(layer, given.step(), block), shared);
                 }
             }

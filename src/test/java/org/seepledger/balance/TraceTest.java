@@ -62,8 +62,7 @@ class TraceTest {
                 random.quantity(0.05),
                 Optional.of(random.quantity(0)),
                 random.random.nextBoolean(),
-                new OuterFaces(
-                        random.random.nextBoolean(), random.random.nextBoolean(), random.random.nextBoolean()));
+                new OuterFaces(random.random.nextBoolean(), random.random.nextBoolean(), random.random.nextBoolean()));
         List<Source> sources = List.of(
                 new Source.Areal("recharge", GriddedValues.constant(0.25)),
                 new Source.Points("pumping", List.of(well(random))));
@@ -106,7 +105,8 @@ class TraceTest {
                 .ledgers()
                 .get(0);
         Periods periods = new Periods(aquifer.times());
-        List<Period> all = new ArrayList<>(periods.every(Periods.Every.INTERVAL, 10).subList(0, 1));
+        List<Period> all =
+                new ArrayList<>(periods.every(Periods.Every.INTERVAL, 10).subList(0, 1));
         all.add(periods.record());
         for (Period period : all) {
             PeriodBudget budget = ledger.budget(period);
@@ -117,8 +117,22 @@ class TraceTest {
                     check(aquifer, prism, rule, TracedRow.of(i, accounts), period, entry.net(), accounts.get(i));
                 }
             }
-            check(aquifer, prism, rule, total("inflow", accounts), period, budget.totals().inflow(), "inflow");
-            check(aquifer, prism, rule, total("outflow", accounts), period, budget.totals().outflow(), "outflow");
+            check(
+                    aquifer,
+                    prism,
+                    rule,
+                    total("inflow", accounts),
+                    period,
+                    budget.totals().inflow(),
+                    "inflow");
+            check(
+                    aquifer,
+                    prism,
+                    rule,
+                    total("outflow", accounts),
+                    period,
+                    budget.totals().outflow(),
+                    "outflow");
             if (ledger.storageKnown()) {
                 double change = budget.totals().storageChange();
                 check(aquifer, prism, rule, total("storage change", accounts), period, change, "storage change");
@@ -133,13 +147,7 @@ class TraceTest {
     }
 
     private static void check(
-            Aquifer aquifer,
-            Prism prism,
-            WellRule rule,
-            TracedRow row,
-            Period period,
-            double volume,
-            Object what) {
+            Aquifer aquifer, Prism prism, WellRule rule, TracedRow row, Period period, double volume, Object what) {
         double[] sum = new double[1];
         Trace.Lines lines = (file, place, value, weight) -> sum[0] += value * weight;
         Trace.Sum traced = Trace.of(aquifer, prism, rule, row, period, 1, lines, Progress.NONE);

@@ -76,7 +76,7 @@ final class Bindings {
 
         GriddedValues read(JsonNode node) {
             if (node.isNumber()) {
-                return GriddedValues.constant(node.doubleValue());
+                return new BoundNumber(node.doubleValue(), place, place, Conversion.NONE);
             }
             if (node.isArray()) {
                 return perLayer(node);
@@ -89,7 +89,7 @@ final class Bindings {
             }
             if (node.has("value")) {
                 double value = node.get("value").doubleValue();
-                return GriddedValues.constant(conversion(node, unit(node)).of(value));
+                return new BoundNumber(value, place + ".value", place, conversion(node, unit(node)));
             }
             return file(node.get("file").textValue(), node);
         }
@@ -144,7 +144,7 @@ final class Bindings {
                             "Name a band that exists, or give the raster all its bands.");
                 }
             }
-            return new RasterValues(files, name, band, conversion(node, unit(node)));
+            return new RasterValues(files, name, band, place, conversion(node, unit(node)));
         }
 
         private Set<String> expanded(String name) {
@@ -185,7 +185,11 @@ final class Bindings {
             GriddedTable table = files.table(name, place, frame, repeats);
             String column = table.column(Optional.ofNullable(node.get("column")).map(JsonNode::textValue));
             Optional<Measure> unit = table.unit(column, unit(node));
-            return new ConvertedValues(table.values(column, steps), conversion(node, unit));
+            return new ConvertedValues(
+                    table.values(column, steps),
+                    new ConvertedValues.Column(name, column, steps, table.isWholeGrid()),
+                    place,
+                    conversion(node, unit));
         }
 
         private Optional<Measure> unit(JsonNode node) {

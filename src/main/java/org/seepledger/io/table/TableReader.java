@@ -139,6 +139,11 @@ final class TableReader implements AutoCloseable {
         }
     }
 
+    /** {@return the file as the user named it} */
+    String shownName() {
+        return shownName;
+    }
+
     /** {@return where the current line ends, from 1} */
     long line() {
         return parser.getCurrentLineNumber();
