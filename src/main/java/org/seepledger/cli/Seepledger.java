@@ -24,7 +24,7 @@ import picocli.CommandLine.IVersionProvider;
         name = "seepledger",
         description = "How much water comes into and goes out of a volume of your own choosing in a gridded aquifer,"
                 + " through each face, from each source and from storage, and how well it all closes.",
-        subcommands = {InspectCommand.class, BalanceCommand.class, TraceCommand.class},
+        subcommands = {InspectCommand.class, BalanceCommand.class, TraceCommand.class, ExtractCommand.class},
         mixinStandardHelpOptions = true,
         versionProvider = Seepledger.ProgramVersion.class,
         synopsisSubcommandLabel = "COMMAND",
@@ -92,6 +92,9 @@ public final class Seepledger {
                 }
                 if (type == TraceCommand.class) {
                     return type.cast(new TraceCommand(terminal));
+                }
+                if (type == ExtractCommand.class) {
+                    return type.cast(new ExtractCommand(terminal));
                 }
                 return CommandLine.defaultFactory().create(type);
             }
