@@ -7,11 +7,13 @@ import org.seepledger.fault.DataFault;
  * Tops, bottoms and thicknesses of a block of cells.
  *
  * <p>A cell without thickness is <i>pinched out</i>: what lies above and below it are neighbours. Surfaces that cross
- * or part by no more than a millionth of their elevation count as touching.
+ * or part by no more than a millionth of their elevation count as touching; a cell thinner than a billionth of it has no
+ * thickness, so that surfaces that are the same but for rounding pinch it out.
  */
 public final class CellGeometry {
 
     private static final double TOUCHING = 1e-6;
+    private static final double PINCHED = 1e-9;
 
     private final Grid grid;
     private final Window inner;
@@ -80,7 +82,15 @@ public final class CellGeometry {
     }
 
     private double tolerance(int cell) {
-        return TOUCHING * Math.max(1, Math.max(Math.abs(top[cell]), Math.abs(bottom[cell])));
+        return TOUCHING * height(cell);
+    }
+
+    private double pinch(int cell) {
+        return PINCHED * height(cell);
+    }
+
+    private double height(int cell) {
+        return Math.max(1, Math.max(Math.abs(top[cell]), Math.abs(bottom[cell])));
     }
 
     /** Where a cell is, as users count. */
@@ -157,7 +167,7 @@ public final class CellGeometry {
      * @param cell its place in the block
      */
     public boolean isPresent(int cell) {
-        return thickness(cell) > 0;
+        return thickness(cell) > pinch(cell);
     }
 
     /**
@@ -166,6 +176,6 @@ public final class CellGeometry {
      * @param cell its place in the block
      */
     public boolean isPinchedOut(int cell) {
-        return thickness(cell) <= 0;
+        return thickness(cell) <= pinch(cell);
     }
 }

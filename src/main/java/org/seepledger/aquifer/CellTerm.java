@@ -12,6 +12,11 @@ package org.seepledger.aquifer;
  */
 public record CellTerm(boolean storage, String item, Entry entry, double[] rates, int missing, double lost) {
 
+    /** The same term with other rates. */
+    CellTerm with(double[] others) {
+        return new CellTerm(storage, item, entry, others, 0, 0);
+    }
+
     /** Where in a cell's height a term enters. */
     public enum Entry {
         /** Evenly over the saturated height. */

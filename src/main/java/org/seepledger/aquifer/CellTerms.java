@@ -22,34 +22,39 @@ final class CellTerms {
         this.active = active;
     }
 
-    List<CellTerm> sources() {
-        List<CellTerm> terms = new ArrayList<>();
+    List<GivenTerm> sources() {
+        List<GivenTerm> terms = new ArrayList<>();
         for (Source source : aquifer.sources()) {
             if (source instanceof Source.Areal areal) {
-                terms.add(term(false, areal.category(), areal.rate(), true));
+                terms.add(new GivenTerm(areal.rate(), rate -> term(false, areal.category(), rate, true)));
             } else if (source instanceof Source.Cells cells) {
-                terms.add(term(false, cells.category(), cells.rate(), false));
+                terms.add(new GivenTerm(cells.rate(), rate -> term(false, cells.category(), rate, false)));
             }
         }
         return terms;
     }
 
-    List<CellTerm> suppliedStorage() {
+    List<GivenTerm> suppliedStorage() {
         return aquifer.storage().supplied().stream()
-                .map(supplied -> term(true, supplied.item(), supplied.rate(), false))
+                .map(supplied -> new GivenTerm(supplied.rate(), rate -> term(true, supplied.item(), rate, false)))
                 .toList();
     }
 
-    List<CellTerm> storageFromHeads() {
+    List<GivenTerm> storageFromHeads() {
         StorageRelease release =
                 new StorageRelease(geometry, saturation, aquifer.times().length(interval));
-        List<CellTerm> terms = new ArrayList<>();
-        aquifer.storage().specificYield().ifPresent(yield -> {
-            double[] rates = release.waterTable(yield, active);
-            terms.add(released(Aquifer.WATER_TABLE_STORAGE, CellTerm.Entry.WHERE_IT_PASSES, rates));
-        });
-        double[] rates = release.elastic(aquifer.storage(), active);
-        terms.add(released(Aquifer.ELASTIC_STORAGE, CellTerm.Entry.THROUGHOUT, rates));
+        List<GivenTerm> terms = new ArrayList<>();
+        aquifer.storage()
+                .specificYield()
+                .ifPresent(yield -> terms.add(new GivenTerm(yield, values -> {
+                    double[] rates = release.waterTable(values, active);
+                    return released(Aquifer.WATER_TABLE_STORAGE, CellTerm.Entry.WHERE_IT_PASSES, rates);
+                })));
+        boolean perLength = aquifer.storage().specificStorage().isPresent();
+        terms.add(new GivenTerm(aquifer.storage().elastic(), values -> {
+            double[] rates = release.elastic(values, perLength, active);
+            return released(Aquifer.ELASTIC_STORAGE, CellTerm.Entry.THROUGHOUT, rates);
+        }));
         return terms;
     }
 

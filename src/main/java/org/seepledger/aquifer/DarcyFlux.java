@@ -1,6 +1,8 @@
 package org.seepledger.aquifer;
 
+import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 
 /**
  * Specific discharge at cell centres.
@@ -40,6 +42,23 @@ public record DarcyFlux(
         for (int i = 0; i < active.length; i++) {
             active[i] &= !Double.isNaN(qx[i]) && !Double.isNaN(qy[i]) && !Double.isNaN(qz[i]);
         }
+        return flows(qx, qy, qz, geometry, saturation, active);
+    }
+
+    @Override
+    public List<GriddedValues> drivers(Aquifer aquifer) {
+        return Stream.concat(Stream.of(x, y), z.stream()).toList();
+    }
+
+    @Override
+    public LinearFlow linear(int interval, CellGeometry geometry, Saturation saturation, boolean[] active) {
+        double[] still = new double[geometry.block().size()];
+        return q -> flows(q[0], q[1], z.isPresent() ? q[2] : still, geometry, saturation, active);
+    }
+
+    private FaceFlows flows(
+            double[] qx, double[] qy, double[] qz, CellGeometry geometry, Saturation saturation, boolean[] active) {
+        Block block = geometry.block();
         if (mapComponents) {
             turn(qx, qy, geometry.grid());
         }

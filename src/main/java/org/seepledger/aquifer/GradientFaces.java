@@ -7,16 +7,28 @@ final class GradientFaces {
     private final Grid grid;
     private final Block block;
     private final Saturation saturation;
-    private final boolean meanHeads;
+    private final double[] heads;
+    private final double[] driving;
     private final boolean[] active;
 
-    GradientFaces(CellGeometry geometry, Saturation saturation, boolean meanHeads, boolean[] active) {
+    GradientFaces(CellGeometry geometry, Saturation saturation, double[] heads, boolean[] active) {
+        this(geometry, saturation, heads, heads, active);
+    }
+
+    private GradientFaces(
+            CellGeometry geometry, Saturation saturation, double[] heads, double[] driving, boolean[] active) {
         this.geometry = geometry;
         this.grid = geometry.grid();
         this.block = geometry.block();
         this.saturation = saturation;
-        this.meanHeads = meanHeads;
+        this.heads = heads;
+        this.driving = driving;
         this.active = active;
+    }
+
+    /** The same conductances, upstream cells and all, under other heads. */
+    GradientFaces drivenBy(double[] others) {
+        return new GradientFaces(geometry, saturation, heads, others, active);
     }
 
     void fillX(double[] conductivity, double[] x) {
@@ -51,10 +63,10 @@ final class GradientFaces {
         if (!active[from] || !active[to]) {
             return 0;
         }
-        double fall = head(from) - head(to);
+        double fall = driving[from] - driving[to];
         if (saturation.isWaterTable(from)) {
             double resistance = 0.5 * (fromSize / conductivity[from] + toSize / conductivity[to]);
-            return fall / resistance * saturation.thickness(fall > 0 ? from : to);
+            return fall / resistance * saturation.thickness(heads[from] - heads[to] > 0 ? from : to);
         }
         double resistance = 0.5
                 * (fromSize / (conductivity[from] * geometry.thickness(from))
@@ -70,10 +82,6 @@ final class GradientFaces {
         int lower = block.cell(below, row, column);
         double resistance = 0.5
                 * (geometry.thickness(upper) / conductivity[upper] + geometry.thickness(lower) / conductivity[lower]);
-        return (head(lower) - head(upper)) / resistance * grid.area(row, column);
-    }
-
-    private double head(int cell) {
-        return meanHeads ? 0.5 * (saturation.start(cell) + saturation.end(cell)) : saturation.end(cell);
+        return (driving[lower] - driving[upper]) / resistance * grid.area(row, column);
     }
 }

@@ -1,5 +1,6 @@
 package org.seepledger.aquifer;
 
+import java.util.List;
 import java.util.Optional;
 import org.seepledger.fault.DataFault;
 
@@ -41,6 +42,31 @@ public record HeadGradient(
     @Override
     public FaceFlows faceFlows(int interval, CellGeometry geometry, Saturation saturation) {
         Block block = geometry.block();
+        Conductivities known = conductivities(interval, geometry);
+        boolean[] active = saturation.active();
+        for (int cell = 0; cell < active.length; cell++) {
+            active[cell] &= !Double.isNaN(known.alongX[cell] + known.alongY[cell] + known.upward[cell]);
+        }
+        GradientFaces faces = new GradientFaces(geometry, saturation, heads(saturation, block), active);
+        return flows(known, faces, geometry, active);
+    }
+
+    @Override
+    public List<GriddedValues> drivers(Aquifer aquifer) {
+        return List.of(new DrivingHead(aquifer.head().orElseThrow(), aquifer.layers(), meanHeads));
+    }
+
+    @Override
+    public LinearFlow linear(int interval, CellGeometry geometry, Saturation saturation, boolean[] active) {
+        Conductivities conductivities = conductivities(interval, geometry);
+        GradientFaces faces = new GradientFaces(geometry, saturation, heads(saturation, geometry.block()), active);
+        return heads -> flows(conductivities, faces.drivenBy(heads[0]), geometry, active);
+    }
+
+    /** Conductivities by cell along the three axes. */
+    private record Conductivities(double[] alongX, double[] alongY, double[] upward) {}
+
+    private Conductivities conductivities(int interval, CellGeometry geometry) {
         double[] alongX = read(conductivity, interval, geometry, "conductivity");
         double[] alongY = conductivityY
                 .map(values -> read(values, interval, geometry, "conductivity_y"))
@@ -48,17 +74,28 @@ public record HeadGradient(
         double[] upward = verticalConductivity
                 .map(values -> read(values, interval, geometry, "vertical_conductivity"))
                 .orElse(alongX);
-        boolean[] active = saturation.active();
-        for (int cell = 0; cell < active.length; cell++) {
-            active[cell] &= !Double.isNaN(alongX[cell] + alongY[cell] + upward[cell]);
-        }
-        FaceFlows flows = FaceFlows.still(block, active);
-        GradientFaces faces = new GradientFaces(geometry, saturation, meanHeads, active);
-        faces.fillX(alongX, flows.x());
-        faces.fillY(alongY, flows.y());
+        return new Conductivities(alongX, alongY, upward);
+    }
+
+    private static FaceFlows flows(
+            Conductivities conductivities, GradientFaces faces, CellGeometry geometry, boolean[] active) {
+        FaceFlows flows = FaceFlows.still(geometry.block(), active);
+        faces.fillX(conductivities.alongX, flows.x());
+        faces.fillY(conductivities.alongY, flows.y());
         new VerticalFaces(geometry, active)
-                .fill(flows.z(), (above, below, row, column) -> faces.upward(upward, above, below, row, column));
+                .fill(
+                        flows.z(),
+                        (above, below, row, column) -> faces.upward(conductivities.upward, above, below, row, column));
         return flows;
+    }
+
+    /** The heads that drive the flow. */
+    private double[] heads(Saturation saturation, Block block) {
+        double[] heads = new double[block.size()];
+        for (int cell = 0; cell < heads.length; cell++) {
+            heads[cell] = meanHeads ? 0.5 * (saturation.start(cell) + saturation.end(cell)) : saturation.end(cell);
+        }
+        return heads;
     }
 
     private static double[] read(GriddedValues values, int interval, CellGeometry geometry, String name) {

@@ -1,6 +1,5 @@
 package org.seepledger.aquifer;
 
-import java.util.Optional;
 import org.seepledger.fault.DataFault;
 
 /**
@@ -41,14 +40,12 @@ final class StorageRelease {
     }
 
     /** Release from elastic storage per cell, length³/time. */
-    double[] elastic(Storage storage, boolean[] active) {
-        Optional<GriddedValues> perLength = storage.specificStorage();
-        GriddedValues given = perLength.or(storage::storativity).orElseGet(() -> GriddedValues.constant(0));
+    double[] elastic(GriddedValues given, boolean perLength, boolean[] active) {
         double[] coefficient = geometry.block().read(given, 0);
-        String name = perLength.isPresent() ? "specific storage" : "storativity";
+        String name = perLength ? "specific storage" : "storativity";
         return perCell(active, cell -> {
             double value = needed(coefficient, cell, name);
-            double specific = perLength.isPresent() ? value : value / geometry.thickness(cell);
+            double specific = perLength ? value : value / geometry.thickness(cell);
             return specific
                     * (thicknessIntegral(saturation.start(cell), cell) - thicknessIntegral(saturation.end(cell), cell));
         });

@@ -113,11 +113,11 @@ final class Contact {
         double toWest = coverage.westFace(row, column);
         double toNorth = coverage.northFace(row, column);
         for (int layer = 0; layer < block.layers(); layer++) {
-            if (toWest != 0) {
+            if (toWest != 0 && column > 0) {
                 double flow = toWest * flows.x()[block.xFace(layer, row, column)];
                 bookRiser(new Riser(layer, row, column - 1, row, column, flow), ofOne, ofOther, tally);
             }
-            if (toNorth != 0) {
+            if (toNorth != 0 && row > 0) {
                 double flow = toNorth * flows.y()[block.yFace(layer, row, column)];
                 bookRiser(new Riser(layer, row, column, row - 1, column, flow), ofOne, ofOther, tally);
             }

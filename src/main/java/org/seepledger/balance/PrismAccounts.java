@@ -65,8 +65,8 @@ final class PrismAccounts {
     }
 
     /** Books what one band of rows holds of the prism in one interval. */
-    void book(IntervalState state, Slab slab, Tally tally) {
-        bookPieces(state, slab, tally);
+    void book(IntervalState state, Slab slab, Bookings bookings) {
+        bookPieces(state, slab, bookings);
         Window rows = state.geometry().inner();
         Coverage coverage = cut.coverage();
         int from = Math.max(rows.row(), coverage.window().row());
@@ -75,18 +75,19 @@ final class PrismAccounts {
             for (int column = coverage.firstColumn(row); column < coverage.columnEnd(row); column++) {
                 double share = coverage.share(row, column);
                 if (share != 0) {
-                    bookLids(slab, row, column, share, tally);
+                    bookings.at(row, column);
+                    bookLids(slab, row, column, share, bookings);
                     if (slab.hasRisers()) {
-                        bookRisers(state.flows(), slab, row, column, tally);
+                        bookRisers(state.flows(), slab, row, column, bookings);
                     }
-                    bookCells(state, slab, row, column, share, tally);
+                    bookCells(state, slab, row, column, share, bookings);
                 }
             }
         }
-        bookWells(state, slab, tally);
+        bookWells(state, slab, bookings);
     }
 
-    private void bookPieces(IntervalState state, Slab slab, Tally tally) {
+    private void bookPieces(IntervalState state, Slab slab, Bookings bookings) {
         Pieces pieces = cut.pieces();
         Map<Integer, double[]> carried = carriedForWells(state.wells());
         int end = pieces.firstFrom(state.geometry().inner().rowEnd());
@@ -94,11 +95,12 @@ final class PrismAccounts {
             int row = pieces.row(piece);
             int column = pieces.column(piece);
             double[] extra = carried.get(piece);
+            bookings.at(row, column);
             for (int layer = chart.first(); layer <= chart.last(); layer++) {
                 double part = slab.part(layer, row, column);
                 double[] density = density(state.flows(), piece, layer, extra);
                 int account = chart.side(cut.item(pieces.side(piece)), layer);
-                tally.throughPiece(account, part * density[0], part * density[1]);
+                bookings.throughPiece(account, part * density[0], part * density[1]);
             }
         }
     }
@@ -120,38 +122,33 @@ final class PrismAccounts {
         };
     }
 
-    private void bookLids(Slab slab, int row, int column, double share, Tally tally) {
+    private void bookLids(Slab slab, int row, int column, double share, Bookings bookings) {
         if (!Double.isNaN(slab.top(row, column))) {
-            tally.throughFace(chart.top(slab.topLayer(row, column)), share * slab.upwardAtTop(row, column));
-            tally.throughFace(chart.bottom(slab.bottomLayer(row, column)), -share * slab.upwardAtBottom(row, column));
+            bookings.throughFace(chart.top(slab.topLayer(row, column)), share * slab.upwardAtTop(row, column));
+            bookings.throughFace(
+                    chart.bottom(slab.bottomLayer(row, column)), -share * slab.upwardAtBottom(row, column));
         }
     }
 
-    private void bookRisers(FaceFlows flows, Slab slab, int row, int column, Tally tally) {
+    private void bookRisers(FaceFlows flows, Slab slab, int row, int column, Bookings bookings) {
         Block block = flows.block();
         double toWest = cut.coverage().westFace(row, column);
         double toNorth = cut.coverage().northFace(row, column);
         for (int layer = chart.first(); layer <= chart.last(); layer++) {
-            if (toWest != 0) {
+            if (toWest != 0 && column > 0) {
                 double flow = toWest * flows.x()[block.xFace(layer, row, column)];
-                bookRiser(new Riser(layer, row, column - 1, row, column, flow), slab, tally);
+                bookRiser(new Riser(layer, row, column - 1, row, column, flow), slab, bookings);
             }
-            if (toNorth != 0) {
+            if (toNorth != 0 && row > 0) {
                 double flow = toNorth * flows.y()[block.yFace(layer, row, column)];
-                bookRiser(new Riser(layer, row, column, row - 1, column, flow), slab, tally);
+                bookRiser(new Riser(layer, row, column, row - 1, column, flow), slab, bookings);
             }
         }
     }
 
-    private void bookRiser(Riser riser, Slab slab, Tally tally) {
-        double throughTop = riser.throughTop(slab);
-        double throughBottom = riser.throughBottom(slab);
-        if (throughTop != 0) {
-            tally.throughFace(chart.top(riser.layer()), throughTop);
-        }
-        if (throughBottom != 0) {
-            tally.throughFace(chart.bottom(riser.layer()), throughBottom);
-        }
+    private void bookRiser(Riser riser, Slab slab, Bookings bookings) {
+        bookings.throughFace(chart.top(riser.layer()), riser.throughTop(slab));
+        bookings.throughFace(chart.bottom(riser.layer()), riser.throughBottom(slab));
     }
 
     /** What pieces in wells' cells carry beside the cells' own fields, by piece and layer. */
@@ -173,34 +170,35 @@ final class PrismAccounts {
         return carried;
     }
 
-    private void bookCells(IntervalState state, Slab slab, int row, int column, double share, Tally tally) {
+    private void bookCells(IntervalState state, Slab slab, int row, int column, double share, Bookings bookings) {
         FaceFlows flows = state.flows();
         for (int layer = chart.first(); layer <= chart.last(); layer++) {
             int cell = flows.block().cell(layer, row, column);
             if (!flows.active()[cell]) {
-                tally.inactive(
+                bookings.inactive(
                         layer - chart.first(), share * state.geometry().grid().area(row, column));
                 continue;
             }
-            tally.fromVolume(share * slab.outflow(layer, row, column), flows.gross(layer, row, column));
+            bookings.fromVolume(share * slab.outflow(layer, row, column), flows.gross(layer, row, column));
             for (CellTerm term : state.terms()) {
                 int account = term.storage() ? chart.storage(term.item(), layer) : chart.source(term.item(), layer);
                 double counted = share * slab.counted(term.entry(), layer, row, column);
-                tally.added(account, counted * term.rates()[cell]);
+                bookings.added(account, counted * term.rates()[cell]);
             }
         }
     }
 
-    private void bookWells(IntervalState state, Slab slab, Tally tally) {
+    private void bookWells(IntervalState state, Slab slab, Bookings bookings) {
         for (WellRate rate : state.wells()) {
             WellCut met = wells.get(rate.well());
             if (!chart.holds(rate.layer())) {
                 continue;
             }
+            bookings.at(rate.well().row(), rate.well().column());
             double counted = rule == WellRule.SPREAD ? met.share() : met.inside() ? 1 : 0;
             double part = slab.part(rate.layer(), rate.well().row(), rate.well().column());
-            tally.added(chart.source(rate.well().well().category(), rate.layer()), counted * part * rate.rate());
-            tally.fromVolume(
+            bookings.added(chart.source(rate.well().well().category(), rate.layer()), counted * part * rate.rate());
+            bookings.fromVolume(
                     part * (counted - met.share()) * rate.rate(), met.pieces().length == 0 ? 0 : Math.abs(rate.rate()));
         }
     }

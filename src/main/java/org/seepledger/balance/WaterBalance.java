@@ -93,7 +93,7 @@ public final class WaterBalance {
 
     private Balance work(int threads, Progress progress) {
         Imbalance imbalance = new Imbalance(window, aquifer.layers().size());
-        List<Band> bands = bands().stream()
+        List<Band> bands = bands(window, aquifer.layers().size()).stream()
                 .map(rows -> new Band(aquifer, rows, prisms, contacts, wells, imbalance))
                 .toList();
         progress.begin("balancing", (long) bands.size() * aquifer.times().intervals());
@@ -134,8 +134,8 @@ public final class WaterBalance {
     }
 
     /** Bands of rows, aligned so that they fall together with the tiles of rasters. */
-    private List<Window> bands() {
-        int perRow = (window.columns() + 2) * aquifer.layers().size();
+    static List<Window> bands(Window window, int layers) {
+        int perRow = (window.columns() + 2) * layers;
         int height = Math.max(8, Integer.highestOneBit(Math.max(1, CELLS_IN_A_BAND / perRow)));
         List<Window> bands = new ArrayList<>();
         for (int row = window.row(); row < window.rowEnd(); ) {

@@ -1,19 +1,13 @@
 package org.seepledger.cli;
 
 import java.nio.file.Path;
-import java.util.Arrays;
-import java.util.Locale;
-import java.util.Optional;
 import java.util.concurrent.Callable;
-import org.seepledger.balance.Periods;
-import org.seepledger.balance.WellRule;
 import org.seepledger.fault.UsageFault;
 import org.seepledger.job.BalanceJob;
 import org.seepledger.job.BalanceOutcome;
 import org.seepledger.job.BalanceRequest;
-import org.seepledger.unit.Measure;
-import picocli.CommandLine.ArgGroup;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 
@@ -58,35 +52,8 @@ final class BalanceCommand implements Callable<Integer> {
             description = "A new or empty folder for the results.")
     private Path out;
 
-    @ArgGroup
-    private Dates dates = new Dates();
-
-    /** Either regular periods or the user's own. */
-    static final class Dates {
-
-        @Option(
-                names = "--every",
-                paramLabel = "PERIOD",
-                description =
-                        "Strike a budget for each interval (default), month, year or water-year, or one for the whole"
-                                + " record.")
-        private String every = "interval";
-
-        @Option(names = "--periods", paramLabel = "FILE", description = "Or for the periods of a CSV: name,from,to.")
-        private Path periods;
-    }
-
-    @Option(
-            names = "--water-year-start",
-            paramLabel = "MONTH",
-            description = "The month in which a water year begins, 1 to 12 (default: 10).")
-    private int waterYearStart = 10;
-
-    @Option(
-            names = "--rate-unit",
-            paramLabel = "UNIT",
-            description = "Unit of rates, such as L/s (default: the set's own).")
-    private String rateUnit;
+    @Mixin
+    private BudgetOptions options = new BudgetOptions();
 
     @Option(
             names = "--volume-unit",
@@ -106,28 +73,6 @@ final class BalanceCommand implements Callable<Integer> {
             description = "End with status 4 if a closure error of any prism and period is larger, whatever its sign.")
     private Double maxClosureError;
 
-    @Option(
-            names = "--wells",
-            paramLabel = "RULE",
-            description =
-                    "How a well counts whose cell a prism cuts: point (default), in full if it is inside; spread, by"
-                            + " the share of its cell inside.")
-    private String wells = "point";
-
-    @Option(
-            names = "--clip",
-            description = "Cut prisms at the grid's edge instead of refusing those that reach beyond it.")
-    private boolean clip;
-
-    @Option(names = "--threads", paramLabel = "N", description = "How many threads may work (default: all processors).")
-    private int threads = Runtime.getRuntime().availableProcessors();
-
-    @Option(
-            names = "--progress",
-            negatable = true,
-            description = "Print progress to standard error (default: if a terminal is attached).")
-    private Boolean progress;
-
     @Option(names = "--overwrite", description = "Replace the files that an earlier run wrote to DIR.")
     private boolean overwrite;
 
@@ -137,8 +82,8 @@ final class BalanceCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        measure("--mass-unit", massUnit, "kg");
-        BalanceOutcome outcome = BalanceJob.run(request(), terminal.progress(progress));
+        Choices.measure("--mass-unit", massUnit, "kg");
+        BalanceOutcome outcome = BalanceJob.run(request(), terminal.progress(options.progress()));
         terminal.out().print(outcome.summary());
         terminal.out().println();
         terminal.out().println("Written to " + out + ": " + String.join(", ", outcome.files()));
@@ -155,9 +100,6 @@ final class BalanceCommand implements Callable<Integer> {
     }
 
     private BalanceRequest request() {
-        if (waterYearStart < 1 || waterYearStart > 12) {
-            throw new UsageFault("--water-year-start is " + waterYearStart + "; give a month from 1 to 12.");
-        }
         if (maxClosureError != null && !(maxClosureError >= 0)) {
             throw new UsageFault("--max-closure-error is " + maxClosureError + "; give a percentage of 0 or more.");
         }
@@ -165,51 +107,14 @@ final class BalanceCommand implements Callable<Integer> {
                 aquifer,
                 prisms,
                 out,
-                choice("--every", dates.every, Periods.Every.class),
-                Optional.ofNullable(dates.periods),
-                waterYearStart,
-                measure("--rate-unit", rateUnit, "m3/d"),
-                measure("--volume-unit", volumeUnit, "m3"),
-                choice("--wells", wells, WellRule.class),
-                clip,
-                checkedThreads(threads),
+                options.every(),
+                options.periods(),
+                options.waterYearStart(),
+                options.rateUnit(),
+                Choices.measure("--volume-unit", volumeUnit, "m3"),
+                options.wells(),
+                options.clip(),
+                options.threads(),
                 overwrite);
-    }
-
-    static int checkedThreads(int threads) {
-        if (threads < 1) {
-            throw new UsageFault("--threads is " + threads + "; give 1 or more.");
-        }
-        return threads;
-    }
-
-    private static <E extends Enum<E>> E choice(String option, String text, Class<E> choices) {
-        for (E choice : choices.getEnumConstants()) {
-            if (choice.name().equals(text.toUpperCase(Locale.ROOT).replace('-', '_'))) {
-                return choice;
-            }
-        }
-        String known = String.join(
-                ", ",
-                Arrays.stream(choices.getEnumConstants())
-                        .map(choice -> choice.name().toLowerCase(Locale.ROOT).replace('_', '-'))
-                        .toList());
-        throw new UsageFault(option + " is \"" + text + "\"; give one of " + known + ".");
-    }
-
-    private static Optional<Measure> measure(String option, String text, String like) {
-        if (text == null) {
-            return Optional.empty();
-        }
-        try {
-            Measure measure = Measure.of(text);
-            if (measure.isCompatible(Measure.of(like))) {
-                return Optional.of(measure);
-            }
-            throw new UsageFault(
-                    option + " is \"" + text + "\", which measures something else; give a unit as " + like + ".");
-        } catch (IllegalArgumentException e) {
-            throw new UsageFault(option + ": " + e.getMessage() + ".");
-        }
     }
 }

@@ -25,7 +25,7 @@ import picocli.CommandLine.IVersionProvider;
         name = "seepledger",
         description = "How much water comes into and goes out of a volume of your own choosing in a gridded aquifer,"
                 + " through each face, from each source and from storage, and how well it all closes.",
-        subcommands = {InspectCommand.class, BalanceCommand.class},
+        subcommands = {InspectCommand.class, BalanceCommand.class, TraceCommand.class, ExtractCommand.class},
         mixinStandardHelpOptions = true,
         versionProvider = Seepledger.ProgramVersion.class,
         synopsisSubcommandLabel = "COMMAND",
@@ -92,6 +92,12 @@ public final class Seepledger {
                 }
                 if (type == BalanceCommand.class) {
                     return type.cast(new BalanceCommand(terminal));
+                }
+                if (type == TraceCommand.class) {
+                    return type.cast(new TraceCommand(terminal));
+                }
+                if (type == ExtractCommand.class) {
+                    return type.cast(new ExtractCommand(terminal));
                 }
                 return CommandLine.defaultFactory().create(type);
             }

@@ -4,9 +4,11 @@ import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.nio.file.AccessDeniedException;
 import java.nio.file.Files;
+import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
@@ -86,7 +88,7 @@ final class OutputFolder implements AutoCloseable {
         if (Files.exists(target) && !Files.isDirectory(target)) {
             throw new UsageFault("The output folder " + target + " is a file. Name a new or empty folder.");
         }
-        if (names(target).isEmpty()) {
+        if (isEmpty(target)) {
             return Set.of();
         }
         if (!overwrite) {
@@ -102,13 +104,13 @@ final class OutputFolder implements AutoCloseable {
         return recorded(record);
     }
 
-    /** The plain file names that an earlier run's record lists; anything else in it is not ours to touch. */
+    /** The files below the folder that an earlier run's record lists; anything else in it is not ours to touch. */
     private static Set<String> recorded(Path record) {
         Set<String> names = new LinkedHashSet<>();
         names.add(RunJson.NAME);
         try {
             RunJson.outputs(record).stream()
-                    .filter(name -> name.matches("[A-Za-z0-9_-][A-Za-z0-9_.-]*"))
+                    .filter(name -> isBelow(record.toAbsolutePath().getParent(), name))
                     .filter(name -> !Files.isDirectory(record.resolveSibling(name)))
                     .forEach(names::add);
         } catch (DataFault e) {
@@ -119,21 +121,58 @@ final class OutputFolder implements AutoCloseable {
         return names;
     }
 
-    private static List<String> names(Path folder) {
+    /** Whether a folder that stands at the target already is a link to elsewhere. */
+    private boolean leadsAway(String name) {
+        return Files.isDirectory(target.resolve(name).getParent()) && !isBelow(target, name);
+    }
+
+    private static boolean isBelow(Path folder, String name) {
+        try {
+            Path file = folder.resolve(name);
+            boolean plain = !name.isEmpty()
+                    && List.of(name.split("/", -1)).stream().noneMatch(step -> step.isEmpty() || step.startsWith("."));
+            return plain
+                    && file.normalize().startsWith(folder)
+                    && Files.isDirectory(file.getParent())
+                    && file.getParent().toRealPath().startsWith(folder.toRealPath());
+        } catch (IOException | InvalidPathException e) {
+            return false;
+        }
+    }
+
+    private static boolean isEmpty(Path folder) {
         if (!Files.isDirectory(folder)) {
-            return List.of();
+            return true;
         }
         try (Stream<Path> files = Files.list(folder)) {
-            return files.map(file -> file.getFileName().toString()).sorted().toList();
+            return files.findAny().isEmpty();
         } catch (IOException e) {
             throw new UsageFault("The output folder " + folder + " cannot be read (" + Unreadable.reason(e)
                     + "). Name a folder where you may read and write.");
         }
     }
 
-    /** Where a file is to be written while the run lasts. */
-    Path file(String name) {
-        return aside.resolve(name);
+    private static List<String> names(Path folder) {
+        try (Stream<Path> files = Files.walk(folder)) {
+            return files.filter(file -> !Files.isDirectory(file))
+                    .map(file -> folder.relativize(file).toString().replace('\\', '/'))
+                    .sorted()
+                    .toList();
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+
+    /**
+     * Where a file is to be written while the run lasts.
+     *
+     * @param name its name, with {@code /} between folders
+     * @throws IOException if its folder cannot be made
+     */
+    Path file(String name) throws IOException {
+        Path file = aside.resolve(name);
+        Files.createDirectories(file.getParent());
+        return file;
     }
 
     /** The names of the files written so far. */
@@ -151,7 +190,8 @@ final class OutputFolder implements AutoCloseable {
         files.remove(RunJson.NAME);
         files.add(RunJson.NAME);
         for (String name : files) {
-            if (Files.exists(target.resolve(name)) && !replaceable.contains(name)) {
+            boolean free = !Files.exists(target.resolve(name)) && !leadsAway(name);
+            if (!free && !replaceable.contains(name)) {
                 throw new UsageFault("The file " + target.resolve(name)
                         + " is in the way, and no earlier run wrote it. Move it or name another folder.");
             }
@@ -159,6 +199,7 @@ final class OutputFolder implements AutoCloseable {
         try {
             Files.createDirectories(target);
             for (String name : files) {
+                Files.createDirectories(target.resolve(name).getParent());
                 Files.move(file(name), target.resolve(name), StandardCopyOption.REPLACE_EXISTING);
             }
             for (String old : replaceable) {
@@ -175,10 +216,13 @@ final class OutputFolder implements AutoCloseable {
     @Override
     public void close() {
         try {
-            for (String name : written()) {
-                Files.deleteIfExists(file(name));
+            List<Path> left;
+            try (Stream<Path> files = Files.walk(aside)) {
+                left = files.sorted(Comparator.reverseOrder()).toList();
             }
-            Files.deleteIfExists(aside);
+            for (Path file : left) {
+                Files.deleteIfExists(file);
+            }
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }

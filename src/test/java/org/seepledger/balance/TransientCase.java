@@ -17,6 +17,7 @@ import org.seepledger.aquifer.PointRate;
 import org.seepledger.aquifer.Screen;
 import org.seepledger.aquifer.Source;
 import org.seepledger.aquifer.Storage;
+import org.seepledger.aquifer.Stored;
 import org.seepledger.aquifer.Times;
 import org.seepledger.aquifer.Well;
 import org.seepledger.aquifer.WellRate;
@@ -110,6 +111,11 @@ final class TransientCase {
         @Override
         public void read(int layer, int step, Window window, double[] target, int offset) {
             all.read(layer, step, window, target, offset);
+        }
+
+        @Override
+        public List<Stored> stored(int layer, int step, Window window) {
+            return all.stored(layer, step, window);
         }
 
         @Override

@@ -76,7 +76,7 @@ final class Bindings {
 
         GriddedValues read(JsonNode node) {
             if (node.isNumber()) {
-                return GriddedValues.constant(finite(node.doubleValue()));
+                return new BoundNumber(finite(node.doubleValue()), place, place, Conversion.NONE);
             }
             if (node.isArray()) {
                 return perLayer(node);
@@ -92,8 +92,7 @@ final class Bindings {
                     throw fault("\"value\" with a band or a column", "one of them", "Give the one that is meant.");
                 }
                 double value = node.get("value").doubleValue();
-                return GriddedValues.constant(
-                        finite(conversion(node, unit(node)).of(value)));
+                return new BoundNumber(value, place + ".value", place, conversion(node, unit(node)));
             }
             return file(node.get("file").textValue(), node);
         }
@@ -155,7 +154,7 @@ final class Bindings {
                             "Name a band that exists, or give the raster all its bands.");
                 }
             }
-            return new RasterValues(files, name, band, conversion(node, unit(node)));
+            return new RasterValues(files, name, band, place, conversion(node, unit(node)));
         }
 
         private Set<String> expanded(String name) {
@@ -201,7 +200,11 @@ final class Bindings {
             GriddedTable table = files.table(name, place, frame, repeats);
             String column = table.column(Optional.ofNullable(node.get("column")).map(JsonNode::textValue));
             Optional<Measure> unit = table.unit(column, unit(node));
-            return new ConvertedValues(table.values(column, steps), conversion(node, unit));
+            return new ConvertedValues(
+                    table.values(column, steps),
+                    new ConvertedValues.Column(name, column, steps, table.isWholeGrid()),
+                    place,
+                    conversion(node, unit));
         }
 
         private Optional<Measure> unit(JsonNode node) {
