@@ -51,6 +51,9 @@ final class CellTerms {
                     return released(Aquifer.WATER_TABLE_STORAGE, CellTerm.Entry.WHERE_IT_PASSES, rates);
                 })));
         boolean perLength = aquifer.storage().specificStorage().isPresent();
+        if (!perLength && aquifer.storage().storativity().isEmpty()) {
+            release.mustHoldWaterTables(active);
+        }
         terms.add(new GivenTerm(aquifer.storage().elastic(), values -> {
             double[] rates = release.elastic(values, perLength, active);
             return released(Aquifer.ELASTIC_STORAGE, CellTerm.Entry.THROUGHOUT, rates);

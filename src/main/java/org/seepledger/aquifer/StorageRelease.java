@@ -51,6 +51,20 @@ final class StorageRelease {
         });
     }
 
+    /** Makes sure that no cell is full, since that would need an elastic coefficient, and none is given. */
+    void mustHoldWaterTables(boolean[] active) {
+        for (int cell = 0; cell < active.length; cell++) {
+            if (active[cell] && Math.max(saturation.start(cell), saturation.end(cell)) > geometry.top(cell)) {
+                throw new DataFault(
+                        "storage",
+                        geometry.place(cell),
+                        "a head above the layer's top, and neither specific_storage nor storativity",
+                        "one of them, since the cell is confined there",
+                        "Add it to aquifer.json; 0 neglects elastic storage.");
+            }
+        }
+    }
+
     /** The integral of saturated thickness over head, from the cell's bottom up to a head. */
     private double thicknessIntegral(double head, int cell) {
         double thickness = geometry.thickness(cell);

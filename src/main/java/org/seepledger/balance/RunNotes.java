@@ -9,8 +9,9 @@ import java.util.Optional;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.FaceMismatch;
 import org.seepledger.aquifer.PlacedWell;
-import org.seepledger.ledger.Group;
 import org.seepledger.prism.Overlap;
+import org.seepledger.prism.PrismCut;
+import org.seepledger.prism.Side;
 import org.seepledger.prism.WellCut;
 
 /**
@@ -18,7 +19,7 @@ import org.seepledger.prism.WellCut;
  *
  * @param overlaps prisms that claim the same ground
  * @param inactive area inside prisms that takes no part, where there is any
- * @param closedSides items that lie wholly on closed outer faces, by prism
+ * @param closedSides sides that lie on closed outer faces, by prism
  * @param cutWells wells in cells that a prism cuts
  * @param uncounted what of each source was not counted, in the interval where it was most
  * @param mismatch the greatest difference between two given values of one face
@@ -43,12 +44,14 @@ public record RunNotes(
     public record InactiveArea(String prism, int layer, double area) {}
 
     /**
-     * An item on a closed outer face of the grid.
+     * A side on a closed outer face of the grid.
      *
      * @param prism the prism
-     * @param item the item
+     * @param side the side
+     * @param item what it counts under
+     * @param empty whether nothing else counts under that, so that its flow cannot be given
      */
-    public record ClosedSide(String prism, String item) {}
+    public record ClosedSide(String prism, String side, String item, boolean empty) {}
 
     /**
      * A well in a cell that a prism cuts.
@@ -90,11 +93,9 @@ public record RunNotes(
                     inactive.add(new InactiveArea(name, accounts.chart().first() + layer, areas[layer]));
                 }
             }
-            accounts.chart().accounts().stream()
-                    .filter(account -> account.group() == Group.SIDE && !account.quantified())
-                    .map(account -> new ClosedSide(name, account.item()))
-                    .distinct()
-                    .forEach(closed::add);
+            if (aquifer.flow().closedSides()) {
+                addClosedSides(closed, name, accounts.cut());
+            }
             accounts.wells().forEach((well, cut) -> addCutWell(wells, name, well, cut));
         }
         return new RunNotes(
@@ -105,6 +106,17 @@ public record RunNotes(
                 total.uncounted(),
                 Optional.ofNullable(total.mismatch()),
                 disagreement);
+    }
+
+    private static void addClosedSides(List<ClosedSide> closed, String prism, PrismCut cut) {
+        boolean[] sideOnEdge = cut.sidesOnEdge();
+        boolean[] itemOnEdge = cut.itemsOnEdge();
+        for (int side = 0; side < sideOnEdge.length; side++) {
+            if (sideOnEdge[side]) {
+                Side named = cut.sides().get(side);
+                closed.add(new ClosedSide(prism, named.name(), named.item(), itemOnEdge[cut.item(side)]));
+            }
+        }
     }
 
     private static void addCutWell(List<CutWell> wells, String prism, PlacedWell well, WellCut cut) {

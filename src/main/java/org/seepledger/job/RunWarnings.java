@@ -46,15 +46,20 @@ final class RunWarnings {
                     + Figures.shown(overlap.area()) + " " + aquifer.lengthUnit()
                     + "2: what lies in both counts in both, and their exchange is left empty.");
         }
-        for (RunNotes.ClosedSide side : notes.closedSides()) {
-            warnings.add(
-                    "\"" + side.item() + "\" of \"" + side.prism() + "\" lies on a closed outer face of the grid: its"
-                            + " flow is left empty and counts as 0 in totals.");
-        }
+        notes.closedSides().forEach(side -> warnings.add(closed(side)));
         notes.mismatch().ifPresent(mismatch -> warnings.add(differing(mismatch)));
         notes.uncounted().forEach((item, uncounted) -> addLost(warnings, item, uncounted));
         records.forEach(record -> addSigns(warnings, record));
         return warnings.stream().distinct().toList();
+    }
+
+    private static String closed(RunNotes.ClosedSide side) {
+        String which = side.side().equals(side.item()) ? "" : ", part of \"" + side.item() + "\",";
+        String what = side.empty()
+                ? "its flow is left empty and counts as 0 in totals."
+                : "it counts as 0 in what it is part of.";
+        return "\"" + side.side() + "\" of \"" + side.prism() + "\"" + which
+                + " lies on a closed outer face of the grid: " + what;
     }
 
     private String differing(FaceMismatch mismatch) {

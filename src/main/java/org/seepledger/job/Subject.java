@@ -3,7 +3,6 @@ package org.seepledger.job;
 import java.io.IOException;
 import java.nio.file.Path;
 import java.util.ArrayList;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -19,10 +18,8 @@ import org.seepledger.io.result.FileRecord;
 import org.seepledger.io.result.ResultUnits;
 import org.seepledger.io.table.PeriodsTable;
 import org.seepledger.ledger.Period;
-import org.seepledger.prism.Overlaps;
 import org.seepledger.prism.Prism;
 import org.seepledger.progress.Progress;
-import org.seepledger.report.Figures;
 import org.seepledger.unit.Measure;
 
 /** What a job about prisms works on: an aquifer folder and the prisms in it, open until closed. */

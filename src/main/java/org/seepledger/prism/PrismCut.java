@@ -146,13 +146,26 @@ public final class PrismCut {
     }
 
     /**
-     * {@return for each item, whether all of its pieces lie on the grid's outer sides}
+     * {@return for each side, whether it lies on the grid's outer sides}
      */
-    public boolean[] itemsOnEdge() {
-        boolean[] onEdge = new boolean[items.size()];
+    public boolean[] sidesOnEdge() {
+        boolean[] onEdge = new boolean[sides.size()];
         Arrays.fill(onEdge, true);
         for (int piece = 0; piece < pieces.count(); piece++) {
-            onEdge[item(pieces.side(piece))] &= pieces.isOnEdge(piece, grid.rows() - 1, grid.columns() - 1);
+            onEdge[pieces.side(piece)] &= pieces.isOnEdge(piece, grid.rows() - 1, grid.columns() - 1);
+        }
+        return onEdge;
+    }
+
+    /**
+     * {@return for each item, whether all of its sides lie on the grid's outer sides}
+     */
+    public boolean[] itemsOnEdge() {
+        boolean[] sideOnEdge = sidesOnEdge();
+        boolean[] onEdge = new boolean[items.size()];
+        Arrays.fill(onEdge, true);
+        for (int side = 0; side < sideOnEdge.length; side++) {
+            onEdge[item(side)] &= sideOnEdge[side];
         }
         return onEdge;
     }

@@ -111,7 +111,8 @@ class AccountsTest {
         Balance balance = balance(aquifer, corner);
         assertThat(balance.notes().closedSides())
                 .containsExactly(
-                        new RunNotes.ClosedSide("corner", "side 1"), new RunNotes.ClosedSide("corner", "side 4"));
+                        new RunNotes.ClosedSide("corner", "side 1", "side 1", true),
+                        new RunNotes.ClosedSide("corner", "side 4", "side 4", true));
         BudgetReading budget = BudgetReading.of(aquifer, balance).get(0);
         assertThat(budget.in("side 4")).isNaN();
         assertThat(budget.out("side 2")).isEqualTo(400, within(1e-11));

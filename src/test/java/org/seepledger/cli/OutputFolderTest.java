@@ -201,7 +201,16 @@ class OutputFolderTest {
 
     @ParameterizedTest
     @ValueSource(
-            strings = {"../mine.txt", "/etc/mine.txt", "..", ".", ".mine", "drawings", "drawings/x", "mine.txt\\u0000"})
+            strings = {
+                "../mine.txt",
+                "/etc/mine.txt",
+                "..",
+                ".",
+                ".mine",
+                "drawings",
+                "drawings/../../mine.txt",
+                "mine.txt\\u0000"
+            })
     void takesNoNameOutOfTheFolderFromARunRecord(String hostile) throws IOException {
         AquiferFiles files = new AquiferFiles(folder);
         succeeded(files.balance());

@@ -19,6 +19,7 @@ import org.seepledger.aquifer.GriddedValues;
 import org.seepledger.aquifer.Layer;
 import org.seepledger.aquifer.Source;
 import org.seepledger.aquifer.Storage;
+import org.seepledger.aquifer.StorageKnowledge;
 import org.seepledger.aquifer.Times;
 import org.seepledger.fault.DataFault;
 import org.seepledger.io.DataFolder;
@@ -230,6 +231,12 @@ public final class AquiferReader {
         }
         if (root.has("solutes")) {
             notes.add("Solutes are described; this version balances water alone.");
+        }
+        boolean yieldAlone = aquifer.storage().specificYield().isPresent()
+                && aquifer.storage().specificStorage().isEmpty()
+                && aquifer.storage().storativity().isEmpty();
+        if (yieldAlone && aquifer.storageKnowledge() == StorageKnowledge.KNOWN) {
+            warnings.add("Neither specific_storage nor storativity is given: elastic storage is taken as 0.");
         }
         if (aquifer.flow() instanceof DarcyFlux flux) {
             boolean areal = aquifer.sources().stream().anyMatch(Source.Areal.class::isInstance);

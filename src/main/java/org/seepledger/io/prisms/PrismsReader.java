@@ -3,8 +3,10 @@ package org.seepledger.io.prisms;
 import com.fasterxml.jackson.databind.JsonNode;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Locale;
+import java.util.Set;
 import java.util.function.Consumer;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.fault.DataFault;
@@ -100,7 +102,18 @@ public record PrismsReader(
         }
         notes.accept(
                 spot + ": " + share + " of its area lies outside the grid; the polygon was cut at the grid's edge");
+        Set<String> lost = items(prism);
+        lost.removeAll(items(left));
+        if (!lost.isEmpty()) {
+            notes.accept(spot + ": wholly outside the grid, and without rows, are " + String.join(", ", lost));
+        }
         return left;
+    }
+
+    private static Set<String> items(Prism prism) {
+        Set<String> items = new LinkedHashSet<>();
+        prism.rings().forEach(ring -> ring.sides().forEach(side -> items.add(side.item())));
+        return items;
     }
 
     private static Prism clipped(GridEdge edge, Prism prism, Spot spot) {

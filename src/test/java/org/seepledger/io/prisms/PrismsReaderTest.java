@@ -285,7 +285,8 @@ class PrismsReaderTest {
         assertThat(notes)
                 .containsExactly(
                         "prisms.geojson, feature 1 \"A\": 50.0 % of its area lies outside the grid; the polygon"
-                                + " was cut at the grid's edge");
+                                + " was cut at the grid's edge",
+                        "prisms.geojson, feature 1 \"A\": wholly outside the grid, and without rows, are side 2");
     }
 
     @Test
