@@ -5,6 +5,7 @@ import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import java.util.function.DoubleUnaryOperator;
 import org.seepledger.unit.Measure;
 
 /**
@@ -137,19 +138,59 @@ public record Aquifer(
     public IntervalState state(int interval, CellGeometry geometry, List<PlacedWell> wells) {
         Saturation saturation = Saturation.of(geometry, layers, head, interval);
         FaceFlows flows = flow.faceFlows(interval, geometry, saturation);
-        CellTerms terms = new CellTerms(this, interval, geometry, flows.active());
-        List<WellRate> rates = new ArrayList<>();
-        for (PlacedWell well : wells) {
-            double rate = well.well().meanRate(times.instant(interval), times.instant(interval + 1));
-            if (rate != 0) {
-                rates.addAll(well.shares(rate, geometry, flows.active()));
-            }
-        }
-        List<CellTerm> all = new ArrayList<>(terms.sources());
+        List<CellTerm> terms = terms(interval, geometry, saturation, flows.active()).stream()
+                .map(GivenTerm::term)
+                .toList();
+        List<WellRate> rates = wellRates(interval, geometry, flows.active(), wells, rate -> rate);
+        return new IntervalState(geometry, saturation, flows, terms, rates);
+    }
+
+    /**
+     * {@return how a block of cells answers to what was given}
+     *
+     * @param interval the interval, from 0
+     * @param geometry the cells, from {@link #geometry}
+     * @param wells the wells to count, all of them in the block
+     * @throws org.seepledger.fault.DataFault if the data are wrong
+     */
+    public Response response(int interval, CellGeometry geometry, List<PlacedWell> wells) {
+        IntervalState state = state(interval, geometry, wells);
+        boolean[] active = state.flows().active();
+        return new Response(
+                this,
+                interval,
+                state,
+                terms(interval, geometry, state.saturation(), active),
+                wellRates(interval, geometry, active, wells, rate -> 1));
+    }
+
+    private List<GivenTerm> terms(int interval, CellGeometry geometry, Saturation saturation, boolean[] active) {
+        CellTerms terms = new CellTerms(this, interval, geometry, saturation, active);
+        List<GivenTerm> all = new ArrayList<>(terms.sources());
         all.addAll(terms.suppliedStorage());
         if (storageFromHeads()) {
             all.addAll(terms.storageFromHeads());
         }
-        return new IntervalState(geometry, flows, all, rates);
+        return all;
+    }
+
+    /** Shares out what is to be counted of each well that has a rate in the interval. */
+    private List<WellRate> wellRates(
+            int interval,
+            CellGeometry geometry,
+            boolean[] active,
+            List<PlacedWell> wells,
+            DoubleUnaryOperator counted) {
+        List<WellRate> rates = new ArrayList<>();
+        Optional<double[]> conductivity = wells.isEmpty()
+                ? Optional.empty()
+                : flow.knownConductivity().map(values -> geometry.block().read(values, interval));
+        for (PlacedWell well : wells) {
+            double rate = well.well().meanRate(times.instant(interval), times.instant(interval + 1));
+            if (rate != 0) {
+                rates.addAll(well.shares(counted.applyAsDouble(rate), geometry, active, conductivity));
+            }
+        }
+        return rates;
     }
 }

@@ -9,7 +9,7 @@ import java.util.Arrays;
 public final class Axis {
 
     /** How near an edge, in cells, a place is taken to lie on it. */
-    public static final double SNAP = 1e-9;
+    static final double SNAP = 1e-9;
 
     private final double origin;
     private final double[] edges;
@@ -116,17 +116,18 @@ public final class Axis {
     }
 
     /**
-     * {@return a place, put on an edge where it lies within {@value #SNAP} of a cell of one, or beyond the axis}
+     * {@return a place, put on an edge where it lies near one or beyond the axis}
      *
      * @param distance from the first edge, in plan units; beyond the axis by no more than rounding
+     * @param near how near, in cells
      */
-    public double snapped(double distance) {
+    double snapped(double distance, double near) {
         if (distance < 0 || distance > edges[count()]) {
             return distance < 0 ? 0 : edges[count()];
         }
         int cell = Math.max(0, Math.min(count() - 1, cellAt(distance)));
         for (int line = cell; line <= cell + 1; line++) {
-            if (Math.abs(distance - edges[line]) <= SNAP * size(cell)) {
+            if (Math.abs(distance - edges[line]) <= near * size(cell)) {
                 return edges[line];
             }
         }
@@ -134,13 +135,12 @@ public final class Axis {
     }
 
     /**
-     * {@return whether a place lies on the axis, its ends included, to {@value #SNAP} of a cell}
+     * {@return whether a place lies on the axis, its ends included}
      *
      * @param distance from the first edge, in plan units
-     * @param rounding by how much more it may lie beyond
+     * @param near how far beyond an end it may lie, in cells
      */
-    boolean holds(double distance, double rounding) {
-        return distance >= -Math.max(rounding, SNAP * size(0))
-                && distance <= edges[count()] + Math.max(rounding, SNAP * size(count() - 1));
+    boolean holds(double distance, double near) {
+        return distance >= -near * size(0) && distance <= edges[count()] + near * size(count() - 1);
     }
 }

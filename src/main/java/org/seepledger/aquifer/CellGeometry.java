@@ -7,11 +7,13 @@ import org.seepledger.fault.DataFault;
  * Tops, bottoms and thicknesses of a block of cells.
  *
  * <p>A cell without thickness is <i>pinched out</i>: what lies above and below it are neighbours. Surfaces that cross
- * or part by no more than a millionth of their elevation count as touching.
+ * or part by no more than a millionth of their elevation count as touching; a cell thinner than a billionth of it has no
+ * thickness, so that surfaces that are the same but for rounding pinch it out.
  */
 public final class CellGeometry {
 
     private static final double TOUCHING = 1e-6;
+    private static final double PINCHED = 1e-9;
 
     private final Grid grid;
     private final Window inner;
@@ -62,7 +64,7 @@ public final class CellGeometry {
         for (int i = 0; i < top.length; i++) {
             if (top[i] - bottom[i] < -tolerance(i)) {
                 throw new DataFault(
-                        "layer " + (i / size + 1),
+                        "the layers",
                         place(i),
                         "a top of " + top[i] + " below a bottom of " + bottom[i],
                         "surfaces that do not cross",
@@ -70,7 +72,7 @@ public final class CellGeometry {
             }
             if (i >= size && Math.abs(top[i] - bottom[i - size]) > tolerance(i)) {
                 throw new DataFault(
-                        "layer " + (i / size + 1),
+                        "the layers",
                         place(i),
                         "a top of " + top[i] + " under a layer that ends at " + bottom[i - size],
                         "layers that touch",
@@ -80,14 +82,35 @@ public final class CellGeometry {
     }
 
     private double tolerance(int cell) {
-        return TOUCHING * Math.max(1, Math.max(Math.abs(top[cell]), Math.abs(bottom[cell])));
+        return TOUCHING * height(cell);
     }
 
-    private String place(int cell) {
-        int inLayer = cell % block.window().size();
-        int row = block.window().row() + inLayer / block.window().columns();
-        int column = block.window().column() + inLayer % block.window().columns();
-        return "row " + (row + 1) + ", column " + (column + 1);
+    private double pinch(int cell) {
+        return PINCHED * height(cell);
+    }
+
+    private double height(int cell) {
+        return Math.max(1, Math.max(Math.abs(top[cell]), Math.abs(bottom[cell])));
+    }
+
+    /** Where a cell is, as users count. */
+    String place(int cell) {
+        return "layer " + (cell / block.window().size() + 1) + ", row " + (row(cell) + 1) + ", column "
+                + (column(cell) + 1);
+    }
+
+    private int row(int cell) {
+        return block.window().row()
+                + cell % block.window().size() / block.window().columns();
+    }
+
+    private int column(int cell) {
+        return block.window().column() + cell % block.window().columns();
+    }
+
+    /** A cell's plan area, in length units squared. */
+    double area(int cell) {
+        return grid.area(row(cell), column(cell));
     }
 
     /**
@@ -144,7 +167,7 @@ public final class CellGeometry {
      * @param cell its place in the block
      */
     public boolean isPresent(int cell) {
-        return thickness(cell) > 0;
+        return thickness(cell) > pinch(cell);
     }
 
     /**
@@ -153,6 +176,6 @@ public final class CellGeometry {
      * @param cell its place in the block
      */
     public boolean isPinchedOut(int cell) {
-        return thickness(cell) <= 0;
+        return thickness(cell) <= pinch(cell);
     }
 }

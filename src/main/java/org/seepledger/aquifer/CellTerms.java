@@ -10,9 +10,11 @@ final class CellTerms {
     private final int interval;
     private final CellGeometry geometry;
     private final Block block;
+    private final Saturation saturation;
     private final boolean[] active;
 
-    CellTerms(Aquifer aquifer, int interval, CellGeometry geometry, boolean[] active) {
+    CellTerms(Aquifer aquifer, int interval, CellGeometry geometry, Saturation saturation, boolean[] active) {
+        this.saturation = saturation;
         this.aquifer = aquifer;
         this.interval = interval;
         this.geometry = geometry;
@@ -20,37 +22,44 @@ final class CellTerms {
         this.active = active;
     }
 
-    List<CellTerm> sources() {
-        List<CellTerm> terms = new ArrayList<>();
+    List<GivenTerm> sources() {
+        List<GivenTerm> terms = new ArrayList<>();
         for (Source source : aquifer.sources()) {
             if (source instanceof Source.Areal areal) {
-                terms.add(term(false, areal.category(), areal.rate(), true));
+                terms.add(new GivenTerm(areal.rate(), rate -> term(false, areal.category(), rate, true)));
             } else if (source instanceof Source.Cells cells) {
-                terms.add(term(false, cells.category(), cells.rate(), false));
+                terms.add(new GivenTerm(cells.rate(), rate -> term(false, cells.category(), rate, false)));
             }
         }
         return terms;
     }
 
-    List<CellTerm> suppliedStorage() {
+    List<GivenTerm> suppliedStorage() {
         return aquifer.storage().supplied().stream()
-                .map(supplied -> term(true, supplied.item(), supplied.rate(), false))
+                .map(supplied -> new GivenTerm(supplied.rate(), rate -> term(true, supplied.item(), rate, false)))
                 .toList();
     }
 
-    List<CellTerm> storageFromHeads() {
-        GriddedValues head = aquifer.head().orElseThrow();
-        double[] start = block.read(head, interval);
-        double[] end = block.read(head, interval + 1);
-        StorageRelease release = new StorageRelease(
-                geometry, aquifer.layers(), start, end, aquifer.times().length(interval));
-        List<CellTerm> terms = new ArrayList<>();
+    List<GivenTerm> storageFromHeads() {
+        StorageRelease release =
+                new StorageRelease(geometry, saturation, aquifer.times().length(interval));
+        List<GivenTerm> terms = new ArrayList<>();
         aquifer.storage()
                 .specificYield()
-                .ifPresent(yield -> terms.add(
-                        new CellTerm(true, Aquifer.WATER_TABLE_STORAGE, release.waterTable(yield, active), 0, 0)));
-        terms.add(new CellTerm(true, Aquifer.ELASTIC_STORAGE, release.elastic(aquifer.storage(), active), 0, 0));
+                .ifPresent(yield -> terms.add(new GivenTerm(yield, values -> {
+                    double[] rates = release.waterTable(values, active);
+                    return released(Aquifer.WATER_TABLE_STORAGE, CellTerm.Entry.WHERE_IT_PASSES, rates);
+                })));
+        boolean perLength = aquifer.storage().specificStorage().isPresent();
+        terms.add(new GivenTerm(aquifer.storage().elastic(), values -> {
+            double[] rates = release.elastic(values, perLength, active);
+            return released(Aquifer.ELASTIC_STORAGE, CellTerm.Entry.THROUGHOUT, rates);
+        }));
         return terms;
+    }
+
+    private static CellTerm released(String item, CellTerm.Entry entry, double[] rates) {
+        return new CellTerm(true, item, entry, rates, 0, 0);
     }
 
     private CellTerm term(boolean storage, String item, GriddedValues values, boolean perArea) {
@@ -77,7 +86,8 @@ final class CellTerms {
                 }
             }
         }
-        return new CellTerm(storage, item, rates, missing, lost);
+        CellTerm.Entry entry = perArea ? CellTerm.Entry.AT_WATER_TABLE : CellTerm.Entry.THROUGHOUT;
+        return new CellTerm(storage, item, entry, rates, missing, lost);
     }
 
     private int uppermost(int row, int column) {

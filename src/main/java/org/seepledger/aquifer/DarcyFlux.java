@@ -1,6 +1,8 @@
 package org.seepledger.aquifer;
 
+import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 
 /**
  * Specific discharge at cell centres.
@@ -21,6 +23,11 @@ public record DarcyFlux(
         implements Flow {
 
     @Override
+    public String given() {
+        return "specific discharge at cell centres";
+    }
+
+    @Override
     public boolean closedSides() {
         return !outerFaces.sides();
     }
@@ -31,10 +38,27 @@ public record DarcyFlux(
         double[] qx = block.read(x, interval);
         double[] qy = block.read(y, interval);
         double[] qz = z.map(values -> block.read(values, interval)).orElseGet(() -> new double[block.size()]);
-        boolean[] active = saturation.active().clone();
+        boolean[] active = saturation.active();
         for (int i = 0; i < active.length; i++) {
             active[i] &= !Double.isNaN(qx[i]) && !Double.isNaN(qy[i]) && !Double.isNaN(qz[i]);
         }
+        return flows(qx, qy, qz, geometry, saturation, active);
+    }
+
+    @Override
+    public List<GriddedValues> drivers(Aquifer aquifer) {
+        return Stream.concat(Stream.of(x, y), z.stream()).toList();
+    }
+
+    @Override
+    public LinearFlow linear(int interval, CellGeometry geometry, Saturation saturation, boolean[] active) {
+        double[] still = new double[geometry.block().size()];
+        return q -> flows(q[0], q[1], z.isPresent() ? q[2] : still, geometry, saturation, active);
+    }
+
+    private FaceFlows flows(
+            double[] qx, double[] qy, double[] qz, CellGeometry geometry, Saturation saturation, boolean[] active) {
+        Block block = geometry.block();
         if (mapComponents) {
             turn(qx, qy, geometry.grid());
         }

@@ -1,6 +1,8 @@
 package org.seepledger.aquifer;
 
+import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 
 /**
  * Volumetric flows through cell faces as they were given: each cell's east, north and up face, and where wanted its
@@ -27,12 +29,33 @@ public record GivenFaceFlow(
         implements Flow {
 
     @Override
+    public String given() {
+        return "volumetric flow through cell faces";
+    }
+
+    @Override
     public boolean closedSides() {
         return false;
     }
 
     @Override
     public FaceFlows faceFlows(int interval, CellGeometry geometry, Saturation saturation) {
-        return new GivenFaces(this, interval, geometry, saturation).fill();
+        return GivenFaces.read(this, interval, geometry, saturation).fill();
+    }
+
+    @Override
+    public List<GriddedValues> drivers(Aquifer aquifer) {
+        return drivers();
+    }
+
+    List<GriddedValues> drivers() {
+        return Stream.concat(
+                        Stream.of(east, north), Stream.of(up, west, south, down).flatMap(Optional::stream))
+                .toList();
+    }
+
+    @Override
+    public LinearFlow linear(int interval, CellGeometry geometry, Saturation saturation, boolean[] active) {
+        return values -> GivenFaces.of(this, values, geometry, active).fill();
     }
 }

@@ -1,5 +1,7 @@
 package org.seepledger.aquifer;
 
+import java.util.Arrays;
+import java.util.Iterator;
 import java.util.Optional;
 
 /** Puts given face values of one interval in their places. */
@@ -16,19 +18,34 @@ final class GivenFaces {
     private final boolean[] active;
     private FaceMismatch worst;
 
-    GivenFaces(GivenFaceFlow given, int interval, CellGeometry geometry, Saturation saturation) {
+    private GivenFaces(GivenFaceFlow given, Iterator<double[]> values, CellGeometry geometry, boolean[] active) {
         this.geometry = geometry;
         this.block = geometry.block();
-        this.east = block.read(given.east(), interval);
-        this.north = block.read(given.north(), interval);
-        this.up = given.up().map(values -> block.read(values, interval)).orElseGet(() -> new double[block.size()]);
-        this.west = given.west().map(values -> block.read(values, interval));
-        this.south = given.south().map(values -> block.read(values, interval));
-        this.down = given.down().map(values -> block.read(values, interval));
-        this.active = saturation.active().clone();
-        for (int i = 0; i < active.length; i++) {
-            active[i] &= !Double.isNaN(east[i]) && !Double.isNaN(north[i]) && !Double.isNaN(up[i]);
+        this.east = values.next();
+        this.north = values.next();
+        this.up = given.up().map(there -> values.next()).orElseGet(() -> new double[block.size()]);
+        this.west = given.west().map(there -> values.next());
+        this.south = given.south().map(there -> values.next());
+        this.down = given.down().map(there -> values.next());
+        this.active = active;
+    }
+
+    /** Faces with given values, in the order of the flow's drivers. */
+    static GivenFaces of(GivenFaceFlow given, double[][] values, CellGeometry geometry, boolean[] active) {
+        return new GivenFaces(given, Arrays.asList(values).iterator(), geometry, active);
+    }
+
+    /** Faces with the values of an interval; cells without one of the first three are inactive. */
+    static GivenFaces read(GivenFaceFlow given, int interval, CellGeometry geometry, Saturation saturation) {
+        Iterator<double[]> values = given.drivers().stream()
+                .map(quantity -> geometry.block().read(quantity, interval))
+                .iterator();
+        GivenFaces faces = new GivenFaces(given, values, geometry, saturation.active());
+        for (int i = 0; i < faces.active.length; i++) {
+            faces.active[i] &=
+                    !Double.isNaN(faces.east[i]) && !Double.isNaN(faces.north[i]) && !Double.isNaN(faces.up[i]);
         }
+        return faces;
     }
 
     FaceFlows fill() {

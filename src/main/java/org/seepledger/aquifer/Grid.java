@@ -1,5 +1,7 @@
 package org.seepledger.aquifer;
 
+import java.util.List;
+
 /**
  * The grid in plan: columns along x, rows along y, turned counter-clockwise about the corner (first x edge, first y
  * edge).
@@ -12,11 +14,25 @@ package org.seepledger.aquifer;
  * @param y the row edges, from south to north
  * @param rotation degrees counter-clockwise
  * @param planUnit how many length units a plan unit has
+ * @param near how near two places count as one, in cells: a billionth, or the rounding of map coordinates where that is
+ *     more
  */
-public record Grid(Axis x, Axis y, double rotation, double planUnit) {
+public record Grid(Axis x, Axis y, double rotation, double planUnit, double near) {
 
     /** By how many steps of the number format turning a map coordinate may be off. */
     private static final int ROUNDING = 4;
+
+    /**
+     * Makes a grid.
+     *
+     * @param x the column edges
+     * @param y the row edges, from south to north
+     * @param rotation degrees counter-clockwise
+     * @param planUnit how many length units a plan unit has
+     */
+    public Grid(Axis x, Axis y, double rotation, double planUnit) {
+        this(x, y, rotation, planUnit, nearness(x, y));
+    }
 
     /**
      * {@return the number of columns}
@@ -118,8 +134,39 @@ public record Grid(Axis x, Axis y, double rotation, double planUnit) {
      * @param mapY its map y
      */
     public boolean holds(double mapX, double mapY) {
-        double rounding = ROUNDING * Math.ulp(Math.max(Math.abs(mapX), Math.abs(mapY)));
-        return x.holds(localX(mapX, mapY), rounding) && y.holds(localY(mapX, mapY), rounding);
+        return x.holds(localX(mapX, mapY), near) && y.holds(localY(mapX, mapY), near);
+    }
+
+    /**
+     * {@return the local x of a place, put on a grid line where it lies near one}
+     *
+     * @param mapX its map x
+     * @param mapY its map y
+     */
+    public double snappedX(double mapX, double mapY) {
+        return x.snapped(localX(mapX, mapY), near);
+    }
+
+    /**
+     * {@return the local y of a place, put on a grid line where it lies near one}
+     *
+     * @param mapX its map x
+     * @param mapY its map y
+     */
+    public double snappedY(double mapX, double mapY) {
+        return y.snapped(localY(mapX, mapY), near);
+    }
+
+    private static double nearness(Axis x, Axis y) {
+        double size = Double.POSITIVE_INFINITY;
+        for (Axis axis : List.of(x, y)) {
+            for (int cell = 0; cell < axis.count(); cell++) {
+                size = Math.min(size, axis.size(cell));
+            }
+        }
+        double reach = x.edge(x.count()) + y.edge(y.count());
+        double farthest = Math.max(Math.abs(x.origin()), Math.abs(y.origin())) + reach;
+        return Math.max(Axis.SNAP, ROUNDING * Math.ulp(farthest) / size);
     }
 
     /**

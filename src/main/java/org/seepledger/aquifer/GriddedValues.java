@@ -1,6 +1,7 @@
 package org.seepledger.aquifer;
 
 import java.util.Arrays;
+import java.util.List;
 
 /**
  * One quantity on the grid, a value per cell, layer and step; a step is an interval, an instant, or, for what does not
@@ -32,6 +33,21 @@ public interface GriddedValues {
     boolean layered();
 
     /**
+     * {@return what the values of a block are made of: the parts' value × factor add up to what {@link #read} gives, to
+     * rounding; none for a quantity that is 0 because nothing was given}
+     *
+     * @param layer the layer, from 0
+     * @param step the interval or instant, from 0
+     * @param window the block
+     */
+    default List<Stored> stored(int layer, int step, Window window) {
+        double[] values = new double[window.size()];
+        read(layer, step, window, values, 0);
+        String place = (layered() ? "layer " + (layer + 1) : "all layers") + (changes() ? ", step " + (step + 1) : "");
+        return List.of(new Stored("", place, false, values, 1));
+    }
+
+    /**
      * {@return the mean of the two instants that bound each interval: snapshots read as intervals}
      *
      * @param snapshots values at instants
@@ -60,6 +76,11 @@ public interface GriddedValues {
             @Override
             public boolean layered() {
                 return false;
+            }
+
+            @Override
+            public List<Stored> stored(int layer, int step, Window window) {
+                return value == 0 ? List.of() : List.of(Stored.everywhere("", "", value, 1, window));
             }
         };
     }

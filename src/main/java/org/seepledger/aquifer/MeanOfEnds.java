@@ -1,5 +1,8 @@
 package org.seepledger.aquifer;
 
+import java.util.List;
+import java.util.stream.Stream;
+
 /**
  * Snapshots at instants, read as intervals: the mean of an interval's two ends.
  *
@@ -15,6 +18,14 @@ record MeanOfEnds(GriddedValues snapshots) implements GriddedValues {
         for (int i = 0; i < end.length; i++) {
             target[offset + i] = 0.5 * (target[offset + i] + end[i]);
         }
+    }
+
+    @Override
+    public List<Stored> stored(int layer, int step, Window window) {
+        return Stream.of(step, step + 1)
+                .flatMap(instant -> snapshots.stored(layer, instant, window).stream())
+                .map(part -> part.times(0.5))
+                .toList();
     }
 
     @Override

@@ -2,6 +2,7 @@ package org.seepledger.aquifer;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import org.seepledger.fault.DataFault;
 
 /**
@@ -26,8 +27,8 @@ public record PlacedWell(Well well, int row, int column, double across, double u
      * @param grid the grid
      */
     public static PlacedWell of(Well well, Grid grid) {
-        double x = grid.x().snapped(grid.localX(well.x(), well.y()));
-        double y = grid.y().snapped(grid.localY(well.x(), well.y()));
+        double x = grid.snappedX(well.x(), well.y());
+        double y = grid.snappedY(well.x(), well.y());
         int column = grid.x().cellAt(x);
         int fromSouth = grid.y().cellAt(y);
         return new PlacedWell(
@@ -43,37 +44,40 @@ public record PlacedWell(Well well, int row, int column, double across, double u
     }
 
     /**
-     * Shares the mean rate of an interval out over the well's layers: by the length of screen in each active cell.
+     * Shares the mean rate of an interval out over the well's layers: by transmissivity behind the screen in each active
+     * cell where conductivity is known, else by the length of screen there.
      *
      * @param rate the well's mean rate, length³/time, not 0
      * @param geometry a block of cells that holds the well's
      * @param active whether each of them is active
+     * @param conductivity their horizontal conductivity, where known
      * @return a rate per layer that the well reaches
      * @throws DataFault if the screen reaches no active cell
      */
-    List<WellRate> shares(double rate, CellGeometry geometry, boolean[] active) {
-        double[] lengths = new double[geometry.block().layers()];
+    List<WellRate> shares(double rate, CellGeometry geometry, boolean[] active, Optional<double[]> conductivity) {
+        double[] weights = new double[geometry.block().layers()];
         double total = 0;
-        for (int layer = 0; layer < lengths.length; layer++) {
+        for (int layer = 0; layer < weights.length; layer++) {
             int cell = geometry.block().cell(layer, row, column);
-            lengths[layer] = active[cell] ? screened(layer, geometry.top(cell), geometry.bottom(cell)) : 0;
-            total += lengths[layer];
+            double conducting = conductivity.map(values -> values[cell]).orElse(1.0);
+            weights[layer] = active[cell] ? weight(layer, geometry.top(cell), geometry.bottom(cell), conducting) : 0;
+            total += weights[layer];
         }
         if (!(total > 0)) {
             throw inInactiveCell();
         }
         List<WellRate> rates = new ArrayList<>();
-        for (int layer = 0; layer < lengths.length; layer++) {
-            if (lengths[layer] > 0) {
-                rates.add(new WellRate(this, layer, rate * (lengths[layer] / total)));
+        for (int layer = 0; layer < weights.length; layer++) {
+            if (weights[layer] > 0) {
+                rates.add(new WellRate(this, layer, rate * (weights[layer] / total)));
             }
         }
         return rates;
     }
 
-    private double screened(int layer, double top, double bottom) {
+    private double weight(int layer, double top, double bottom, double conducting) {
         if (well.screen() instanceof Screen.Between between) {
-            return Math.max(0, Math.min(top, between.top()) - Math.max(bottom, between.bottom()));
+            return conducting * Math.max(0, Math.min(top, between.top()) - Math.max(bottom, between.bottom()));
         }
         return ((Screen.InLayer) well.screen()).layer() == layer ? 1 : 0;
     }

@@ -25,6 +25,11 @@ public record Storage(
         supplied = List.copyOf(supplied);
     }
 
+    /** Specific storage, or storativity in its place; 0 where neither was given. */
+    GriddedValues elastic() {
+        return specificStorage.or(() -> storativity).orElseGet(() -> GriddedValues.constant(0));
+    }
+
     /**
      * A release that was computed elsewhere.
      *

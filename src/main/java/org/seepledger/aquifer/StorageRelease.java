@@ -1,7 +1,5 @@
 package org.seepledger.aquifer;
 
-import java.util.List;
-import java.util.Optional;
 import org.seepledger.fault.DataFault;
 
 /**
@@ -9,63 +7,55 @@ import org.seepledger.fault.DataFault;
  *
  * <p>Specific yield × area × the fall of the water table within the cell (water-table layers), and specific storage ×
  * area × ∫ b dh over the fall of head, where b is the saturated thickness at head h. Both integrals are closed forms, so a
- * cell that fills, drains or turns from confined to unconfined within the interval is split at its top and bottom. A
- * head of negative infinity stands for a dry cell: its head is at the cell's bottom.
+ * cell that fills, drains or turns from confined to unconfined within the interval is split at its top and bottom.
  */
 final class StorageRelease {
 
     private final CellGeometry geometry;
-    private final List<Layer> layers;
-    private final double[] start;
-    private final double[] end;
+    private final Saturation saturation;
     private final double length;
 
     /**
      * Prepares one interval.
      *
      * @param geometry the cells
-     * @param layers the layers
-     * @param start the heads at the interval's begin
-     * @param end the heads at its end
+     * @param saturation their heads in the interval
      * @param length how long it lasts
      */
-    StorageRelease(CellGeometry geometry, List<Layer> layers, double[] start, double[] end, double length) {
+    StorageRelease(CellGeometry geometry, Saturation saturation, double length) {
         this.geometry = geometry;
-        this.layers = layers;
-        this.start = start;
-        this.end = end;
+        this.saturation = saturation;
         this.length = length;
     }
 
     /** Release from specific yield per cell, length³/time; 0 in layers that hold no water table. */
     double[] waterTable(GriddedValues specificYield, boolean[] active) {
         double[] yield = geometry.block().read(specificYield, 0);
-        return perCell(active, cell -> {
-            if (!layers.get(layerOf(cell)).waterTable()) {
-                return 0;
-            }
-            return needed(yield, cell, "specific yield") * (within(start[cell], cell) - within(end[cell], cell));
-        });
+        return perCell(
+                active,
+                cell -> saturation.isWaterTable(cell)
+                        ? needed(yield, cell, "specific yield")
+                                * (within(saturation.start(cell), cell) - within(saturation.end(cell), cell))
+                        : 0);
     }
 
     /** Release from elastic storage per cell, length³/time. */
-    double[] elastic(Storage storage, boolean[] active) {
-        Optional<GriddedValues> perLength = storage.specificStorage();
-        GriddedValues given = perLength.or(storage::storativity).orElseGet(() -> GriddedValues.constant(0));
+    double[] elastic(GriddedValues given, boolean perLength, boolean[] active) {
         double[] coefficient = geometry.block().read(given, 0);
-        String name = perLength.isPresent() ? "specific storage" : "storativity";
+        String name = perLength ? "specific storage" : "storativity";
         return perCell(active, cell -> {
             double value = needed(coefficient, cell, name);
-            double specific = perLength.isPresent() ? value : value / geometry.thickness(cell);
-            return specific * (thicknessIntegral(start[cell], cell) - thicknessIntegral(end[cell], cell));
+            double specific = perLength ? value : value / geometry.thickness(cell);
+            return specific
+                    * (thicknessIntegral(saturation.start(cell), cell) - thicknessIntegral(saturation.end(cell), cell));
         });
     }
 
     /** The integral of saturated thickness over head, from the cell's bottom up to a head. */
     private double thicknessIntegral(double head, int cell) {
         double thickness = geometry.thickness(cell);
-        double above = head == Double.NEGATIVE_INFINITY ? 0 : head - geometry.bottom(cell);
-        if (!layers.get(layerOf(cell)).waterTable()) {
+        double above = head - geometry.bottom(cell);
+        if (!saturation.isWaterTable(cell)) {
             return thickness * above;
         }
         if (above > thickness) {
@@ -78,23 +68,15 @@ final class StorageRelease {
         return Math.min(Math.max(head, geometry.bottom(cell)), geometry.top(cell));
     }
 
-    private int layerOf(int cell) {
-        return cell / geometry.block().window().size();
-    }
-
     private interface PerArea {
         double releasePerArea(int cell);
     }
 
     private double[] perCell(boolean[] active, PerArea release) {
-        Window window = geometry.block().window();
         double[] rates = new double[active.length];
         for (int cell = 0; cell < rates.length; cell++) {
             if (active[cell]) {
-                int place = cell % window.size();
-                double area = geometry.grid()
-                        .area(window.row() + place / window.columns(), window.column() + place % window.columns());
-                rates[cell] = release.releasePerArea(cell) * area / length;
+                rates[cell] = release.releasePerArea(cell) * geometry.area(cell) / length;
             }
         }
         return rates;
@@ -102,12 +84,9 @@ final class StorageRelease {
 
     private double needed(double[] values, int cell, String what) {
         if (Double.isNaN(values[cell])) {
-            Window window = geometry.block().window();
-            int place = cell % window.size();
             throw new DataFault(
                     what,
-                    "layer " + (layerOf(cell) + 1) + ", row " + (window.row() + place / window.columns() + 1)
-                            + ", column " + (window.column() + place % window.columns() + 1),
+                    geometry.place(cell),
                     "no value in an active cell",
                     "a value in each active cell",
                     "Give one there, or make the cell inactive.");

@@ -43,6 +43,24 @@ public record Well(String name, String category, double x, double y, Screen scre
     }
 
     /**
+     * {@return what the mean rate over an interval is made of: number × factor for each line of the schedule that lasts in
+     * it}
+     *
+     * @param from the interval's begin, in time units
+     * @param to its end
+     */
+    public List<Stored> stored(double from, double to) {
+        List<Stored> parts = new ArrayList<>();
+        for (PointRate line : schedule) {
+            double overlap = Math.min(to, line.to()) - Math.max(from, line.from());
+            if (overlap > 0) {
+                parts.add(line.given().times(overlap / (to - from)));
+            }
+        }
+        return parts;
+    }
+
+    /**
      * {@return the mean rate over an interval, length³/time, positive where it adds water}
      *
      * @param from the interval's begin, in time units

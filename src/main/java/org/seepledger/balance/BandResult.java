@@ -12,18 +12,24 @@ import org.seepledger.aquifer.IntervalState;
 final class BandResult {
 
     private final List<List<Tally>> tallies = new ArrayList<>();
+    private final List<List<Tally>> exchanged = new ArrayList<>();
     private final List<Map<String, Uncounted>> uncounted = new ArrayList<>();
     private FaceMismatch mismatch;
 
-    BandResult(List<PrismAccounts> prisms, int intervals) {
+    BandResult(List<PrismAccounts> prisms, List<Contact> contacts, int intervals) {
         for (int interval = 0; interval < intervals; interval++) {
             tallies.add(prisms.stream().map(PrismAccounts::emptyTally).toList());
+            exchanged.add(contacts.stream().map(contact -> Contact.emptyTally()).toList());
             uncounted.add(new LinkedHashMap<>());
         }
     }
 
     Tally tally(int interval, int prism) {
         return tallies.get(interval).get(prism);
+    }
+
+    Tally exchanged(int interval, int contact) {
+        return exchanged.get(interval).get(contact);
     }
 
     void note(int interval, IntervalState state) {
@@ -43,6 +49,9 @@ final class BandResult {
         for (int interval = 0; interval < tallies.size(); interval++) {
             for (int prism = 0; prism < tallies.get(interval).size(); prism++) {
                 tally(interval, prism).add(other.tally(interval, prism));
+            }
+            for (int contact = 0; contact < exchanged.get(interval).size(); contact++) {
+                exchanged(interval, contact).add(other.exchanged(interval, contact));
             }
             Map<String, Uncounted> own = uncounted.get(interval);
             other.uncounted.get(interval).forEach((item, more) -> own.merge(item, more, Uncounted::plus));

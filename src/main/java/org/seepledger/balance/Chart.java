@@ -1,6 +1,7 @@
 package org.seepledger.balance;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.StorageKnowledge;
@@ -17,12 +18,15 @@ final class Chart {
     private final List<Account> accounts = new ArrayList<>();
     private final List<String> categories;
     private final List<String> storageItems;
-    private final int lids;
+    private final int[] tops;
+    private final int[] bottoms;
     private final int sources;
     private final int storage;
 
     Chart(Aquifer aquifer, PrismCut cut) {
-        VerticalRange.Layers range = layersOf(cut.prism().range(), aquifer);
+        VerticalRange.Layers range = cut.prism().range() instanceof VerticalRange.Elevations elevations
+                ? TouchedLayers.of(aquifer, cut, elevations)
+                : (VerticalRange.Layers) cut.prism().range();
         this.first = range.first();
         this.layers = range.last() - range.first() + 1;
         this.categories = aquifer.categories();
@@ -32,9 +36,9 @@ final class Chart {
             boolean quantified = !(onEdge[item] && aquifer.flow().closedSides());
             addLayers(Group.SIDE, cut.items().get(item), quantified);
         }
-        this.lids = accounts.size();
-        accounts.add(new Account(Group.LID, "top", first, true));
-        accounts.add(new Account(Group.LID, "bottom", range.last(), true));
+        boolean[] stepped = stepped(cut.prism().range());
+        this.tops = addLids("top", stepped[0], range.first());
+        this.bottoms = addLids("bottom", stepped[1], range.last());
         this.sources = accounts.size();
         categories.forEach(category -> addLayers(Group.SOURCE, category, true));
         this.storage = accounts.size();
@@ -42,10 +46,28 @@ final class Chart {
         storageItems.forEach(item -> addLayers(Group.STORAGE, item, known));
     }
 
-    private static VerticalRange.Layers layersOf(VerticalRange range, Aquifer aquifer) {
-        return range instanceof VerticalRange.Layers given
-                ? given
-                : new VerticalRange.Layers(0, aquifer.layers().size() - 1);
+    /** Whether the top and the bottom may lie in any layer of the range. */
+    private static boolean[] stepped(VerticalRange range) {
+        return range instanceof VerticalRange.Elevations elevations
+                ? new boolean[] {
+                    elevations.top().isPresent(), elevations.bottom().isPresent()
+                }
+                : new boolean[2];
+    }
+
+    /** Adds a lid: one account, or one for each layer that it may lie in; tells which account a layer's is. */
+    private int[] addLids(String item, boolean stepped, int onlyLayer) {
+        int[] byLayer = new int[layers];
+        Arrays.fill(byLayer, accounts.size());
+        if (!stepped) {
+            accounts.add(new Account(Group.LID, item, onlyLayer, true));
+            return byLayer;
+        }
+        for (int layer = 0; layer < layers; layer++) {
+            byLayer[layer] = accounts.size();
+            accounts.add(new Account(Group.LID, item, first + layer, true));
+        }
+        return byLayer;
     }
 
     private void addLayers(Group group, String item, boolean quantified) {
@@ -78,12 +100,12 @@ final class Chart {
         return item * layers + layer - first;
     }
 
-    int top() {
-        return lids;
+    int top(int layer) {
+        return tops[layer - first];
     }
 
-    int bottom() {
-        return lids + 1;
+    int bottom(int layer) {
+        return bottoms[layer - first];
     }
 
     int source(String category, int layer) {

@@ -4,9 +4,9 @@ import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.Block;
-import org.seepledger.aquifer.CellGeometry;
 import org.seepledger.aquifer.CellTerm;
 import org.seepledger.aquifer.FaceFlows;
 import org.seepledger.aquifer.IntervalState;
@@ -16,6 +16,7 @@ import org.seepledger.aquifer.Window;
 import org.seepledger.prism.Coverage;
 import org.seepledger.prism.Pieces;
 import org.seepledger.prism.PrismCut;
+import org.seepledger.prism.VerticalRange;
 import org.seepledger.prism.WellCut;
 
 /** Books the flows of one prism, band by band. */
@@ -45,13 +46,27 @@ final class PrismAccounts {
         return wells;
     }
 
+    /** The elevations of the prism's lids over a window; empty where they are interfaces. */
+    Optional<Elevations> elevations(Window window) {
+        return cut.prism().range() instanceof VerticalRange.Elevations range
+                ? Optional.of(new Elevations(range, window))
+                : Optional.empty();
+    }
+
     Tally emptyTally() {
         return new Tally(chart.accounts().size(), chart.layers());
     }
 
+    /** How the prism's vertical range meets the cells of a band in one interval. */
+    Slab slab(IntervalState state, Optional<Elevations> elevations) {
+        return elevations
+                .<Slab>map(between -> new ElevationSlab(between, state))
+                .orElseGet(() -> new LayerSlab(chart, state));
+    }
+
     /** Books what one band of rows holds of the prism in one interval. */
-    void book(IntervalState state, Tally tally) {
-        bookPieces(state, tally);
+    void book(IntervalState state, Slab slab, Bookings bookings) {
+        bookPieces(state, slab, bookings);
         Window rows = state.geometry().inner();
         Coverage coverage = cut.coverage();
         int from = Math.max(rows.row(), coverage.window().row());
@@ -60,17 +75,19 @@ final class PrismAccounts {
             for (int column = coverage.firstColumn(row); column < coverage.columnEnd(row); column++) {
                 double share = coverage.share(row, column);
                 if (share != 0) {
-                    bookLids(state, row, column, share, tally);
-                    bookCells(state, row, column, share, tally);
+                    bookings.at(row, column);
+                    bookLids(slab, row, column, share, bookings);
+                    if (slab.hasRisers()) {
+                        bookRisers(state.flows(), slab, row, column, bookings);
+                    }
+                    bookCells(state, slab, row, column, share, bookings);
                 }
             }
         }
-        bookWells(state, tally);
+        bookWells(state, slab, bookings);
     }
 
-    private void bookPieces(IntervalState state, Tally tally) {
-        FaceFlows flows = state.flows();
-        Block block = flows.block();
+    private void bookPieces(IntervalState state, Slab slab, Bookings bookings) {
         Pieces pieces = cut.pieces();
         Map<Integer, double[]> carried = carriedForWells(state.wells());
         int end = pieces.firstFrom(state.geometry().inner().rowEnd());
@@ -78,22 +95,64 @@ final class PrismAccounts {
             int row = pieces.row(piece);
             int column = pieces.column(piece);
             double[] extra = carried.get(piece);
+            bookings.at(row, column);
             for (int layer = chart.first(); layer <= chart.last(); layer++) {
-                double west = flows.x()[block.xFace(layer, row, column)];
-                double east = flows.x()[block.xFace(layer, row, column + 1)];
-                double south = flows.y()[block.yFace(layer, row + 1, column)];
-                double north = flows.y()[block.yFace(layer, row, column)];
-                double more = extra == null ? 0 : extra[layer - chart.first()];
-                tally.throughPiece(
-                        chart.side(cut.item(pieces.side(piece)), layer),
-                        pieces.outflowAtStart(piece, west, east, south, north) + more,
-                        pieces.outflowAtEnd(piece, west, east, south, north) + more);
+                double part = slab.part(layer, row, column);
+                double[] density = density(state.flows(), piece, layer, extra);
+                int account = chart.side(cut.item(pieces.side(piece)), layer);
+                bookings.throughPiece(account, part * density[0], part * density[1]);
             }
         }
     }
 
+    /** The outflow density at a piece's begin and end, if the whole height of its cell counts. */
+    double[] density(FaceFlows flows, int piece, int layer, double[] carriedByLayer) {
+        Pieces pieces = cut.pieces();
+        Block block = flows.block();
+        int row = pieces.row(piece);
+        int column = pieces.column(piece);
+        double west = flows.x()[block.xFace(layer, row, column)];
+        double east = flows.x()[block.xFace(layer, row, column + 1)];
+        double south = flows.y()[block.yFace(layer, row + 1, column)];
+        double north = flows.y()[block.yFace(layer, row, column)];
+        double carried = carriedByLayer == null ? 0 : carriedByLayer[layer - chart.first()];
+        return new double[] {
+            pieces.outflowAtStart(piece, west, east, south, north) + carried,
+            pieces.outflowAtEnd(piece, west, east, south, north) + carried
+        };
+    }
+
+    private void bookLids(Slab slab, int row, int column, double share, Bookings bookings) {
+        if (!Double.isNaN(slab.top(row, column))) {
+            bookings.throughFace(chart.top(slab.topLayer(row, column)), share * slab.upwardAtTop(row, column));
+            bookings.throughFace(
+                    chart.bottom(slab.bottomLayer(row, column)), -share * slab.upwardAtBottom(row, column));
+        }
+    }
+
+    private void bookRisers(FaceFlows flows, Slab slab, int row, int column, Bookings bookings) {
+        Block block = flows.block();
+        double toWest = cut.coverage().westFace(row, column);
+        double toNorth = cut.coverage().northFace(row, column);
+        for (int layer = chart.first(); layer <= chart.last(); layer++) {
+            if (toWest != 0 && column > 0) {
+                double flow = toWest * flows.x()[block.xFace(layer, row, column)];
+                bookRiser(new Riser(layer, row, column - 1, row, column, flow), slab, bookings);
+            }
+            if (toNorth != 0 && row > 0) {
+                double flow = toNorth * flows.y()[block.yFace(layer, row, column)];
+                bookRiser(new Riser(layer, row, column, row - 1, column, flow), slab, bookings);
+            }
+        }
+    }
+
+    private void bookRiser(Riser riser, Slab slab, Bookings bookings) {
+        bookings.throughFace(chart.top(riser.layer()), riser.throughTop(slab));
+        bookings.throughFace(chart.bottom(riser.layer()), riser.throughBottom(slab));
+    }
+
     /** What pieces in wells' cells carry beside the cells' own fields, by piece and layer. */
-    private Map<Integer, double[]> carriedForWells(List<WellRate> rates) {
+    Map<Integer, double[]> carriedForWells(List<WellRate> rates) {
         Map<Integer, double[]> carried = new HashMap<>();
         if (rule == WellRule.SPREAD) {
             return carried;
@@ -111,47 +170,36 @@ final class PrismAccounts {
         return carried;
     }
 
-    private void bookLids(IntervalState state, int row, int column, double share, Tally tally) {
-        FaceFlows flows = state.flows();
-        CellGeometry geometry = state.geometry();
-        Block block = flows.block();
-        boolean open = false;
-        for (int layer = chart.first(); layer <= chart.last(); layer++) {
-            open |= !geometry.isPinchedOut(block.cell(layer, row, column));
-        }
-        if (open) {
-            tally.throughFace(chart.top(), share * flows.z()[block.zFace(chart.first(), row, column)]);
-            tally.throughFace(chart.bottom(), -share * flows.z()[block.zFace(chart.last() + 1, row, column)]);
-        }
-    }
-
-    private void bookCells(IntervalState state, int row, int column, double share, Tally tally) {
+    private void bookCells(IntervalState state, Slab slab, int row, int column, double share, Bookings bookings) {
         FaceFlows flows = state.flows();
         for (int layer = chart.first(); layer <= chart.last(); layer++) {
             int cell = flows.block().cell(layer, row, column);
             if (!flows.active()[cell]) {
-                tally.inactive(
+                bookings.inactive(
                         layer - chart.first(), share * state.geometry().grid().area(row, column));
                 continue;
             }
-            tally.fromVolume(-share * flows.gain(layer, row, column), flows.gross(layer, row, column));
+            bookings.fromVolume(share * slab.outflow(layer, row, column), flows.gross(layer, row, column));
             for (CellTerm term : state.terms()) {
                 int account = term.storage() ? chart.storage(term.item(), layer) : chart.source(term.item(), layer);
-                tally.added(account, share * term.rates()[cell]);
+                double counted = share * slab.counted(term.entry(), layer, row, column);
+                bookings.added(account, counted * term.rates()[cell]);
             }
         }
     }
 
-    private void bookWells(IntervalState state, Tally tally) {
+    private void bookWells(IntervalState state, Slab slab, Bookings bookings) {
         for (WellRate rate : state.wells()) {
             WellCut met = wells.get(rate.well());
             if (!chart.holds(rate.layer())) {
                 continue;
             }
+            bookings.at(rate.well().row(), rate.well().column());
             double counted = rule == WellRule.SPREAD ? met.share() : met.inside() ? 1 : 0;
-            tally.added(chart.source(rate.well().well().category(), rate.layer()), counted * rate.rate());
-            tally.fromVolume(
-                    (counted - met.share()) * rate.rate(), met.pieces().length == 0 ? 0 : Math.abs(rate.rate()));
+            double part = slab.part(rate.layer(), rate.well().row(), rate.well().column());
+            bookings.added(chart.source(rate.well().well().category(), rate.layer()), counted * part * rate.rate());
+            bookings.fromVolume(
+                    part * (counted - met.share()) * rate.rate(), met.pieces().length == 0 ? 0 : Math.abs(rate.rate()));
         }
     }
 }

@@ -10,11 +10,13 @@ import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.FaceMismatch;
 import org.seepledger.aquifer.PlacedWell;
 import org.seepledger.ledger.Group;
+import org.seepledger.prism.Overlap;
 import org.seepledger.prism.WellCut;
 
 /**
  * What the reader of a balance must know beside its numbers.
  *
+ * @param overlaps prisms that claim the same ground
  * @param inactive area inside prisms that takes no part, where there is any
  * @param closedSides items that lie wholly on closed outer faces, by prism
  * @param cutWells wells in cells that a prism cuts
@@ -23,6 +25,7 @@ import org.seepledger.prism.WellCut;
  * @param disagreement the greatest difference between the two routes, as a share of gross flow
  */
 public record RunNotes(
+        List<Overlap> overlaps,
         List<InactiveArea> inactive,
         List<ClosedSide> closedSides,
         List<CutWell> cutWells,
@@ -58,13 +61,14 @@ public record RunNotes(
 
     /** Copies the collections. */
     public RunNotes {
+        overlaps = List.copyOf(overlaps);
         inactive = List.copyOf(inactive);
         closedSides = List.copyOf(closedSides);
         cutWells = List.copyOf(cutWells);
         uncounted = Collections.unmodifiableMap(new LinkedHashMap<>(uncounted));
     }
 
-    static RunNotes of(Aquifer aquifer, List<PrismAccounts> prisms, BandResult total) {
+    static RunNotes of(Aquifer aquifer, List<PrismAccounts> prisms, List<Overlap> overlaps, BandResult total) {
         List<InactiveArea> inactive = new ArrayList<>();
         List<ClosedSide> closed = new ArrayList<>();
         List<CutWell> wells = new ArrayList<>();
@@ -94,7 +98,13 @@ public record RunNotes(
             accounts.wells().forEach((well, cut) -> addCutWell(wells, name, well, cut));
         }
         return new RunNotes(
-                inactive, closed, wells, total.uncounted(), Optional.ofNullable(total.mismatch()), disagreement);
+                overlaps,
+                inactive,
+                closed,
+                wells,
+                total.uncounted(),
+                Optional.ofNullable(total.mismatch()),
+                disagreement);
     }
 
     private static void addCutWell(List<CutWell> wells, String prism, PlacedWell well, WellCut cut) {

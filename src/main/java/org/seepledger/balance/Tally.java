@@ -6,7 +6,7 @@ import org.seepledger.fault.ProgramFault;
  * The running sums of one prism in one interval: gross rates by account, both routes to its net outflow, and the area of
  * its cells that take no part.
  */
-final class Tally {
+final class Tally implements Bookings {
 
     private static final int FACES = 0;
     private static final int VOLUME = 1;
@@ -23,11 +23,14 @@ final class Tally {
         inactiveArea = new Sums(layers);
     }
 
-    /**
-     * Books a flow through a boundary piece whose outflow density goes from start to end: in and out apart, and the same
-     * to the last bit seen from the other side.
-     */
-    void throughPiece(int account, double start, double end) {
+    @Override
+    public void at(int row, int column) {
+        // Sums are the same wherever something is booked.
+    }
+
+    /** In and out apart, and the same to the last bit seen from the other side. */
+    @Override
+    public void throughPiece(int account, double start, double end) {
         double net = 0.5 * (start + end);
         routes.add(FACES, net);
         if (start >= 0 && end >= 0) {
@@ -42,24 +45,25 @@ final class Tally {
         }
     }
 
-    /** Books a uniform outflow through a face. */
-    void throughFace(int account, double out) {
+    @Override
+    public void throughFace(int account, double out) {
         routes.add(FACES, out);
         (out >= 0 ? outflow : inflow).add(account, Math.abs(out));
     }
 
-    /** Books what a source adds or storage releases; taken if negative. */
-    void added(int account, double rate) {
+    @Override
+    public void added(int account, double rate) {
         (rate >= 0 ? inflow : outflow).add(account, Math.abs(rate));
     }
 
-    /** Counts what a part of the volume sends out, and the gross flow it is measured against. */
-    void fromVolume(double out, double gross) {
+    @Override
+    public void fromVolume(double out, double gross) {
         routes.add(VOLUME, out);
         routes.add(GROSS, gross);
     }
 
-    void inactive(int layer, double area) {
+    @Override
+    public void inactive(int layer, double area) {
         inactiveArea.add(layer, area);
     }
 

@@ -13,6 +13,8 @@ import org.seepledger.aquifer.PlacedWell;
 import org.seepledger.aquifer.StorageKnowledge;
 import org.seepledger.aquifer.Window;
 import org.seepledger.ledger.Ledger;
+import org.seepledger.prism.Overlap;
+import org.seepledger.prism.Overlaps;
 import org.seepledger.prism.Prism;
 import org.seepledger.prism.PrismCut;
 import org.seepledger.progress.Progress;
@@ -28,6 +30,8 @@ public final class WaterBalance {
     private final Aquifer aquifer;
     private final List<PlacedWell> wells;
     private final List<PrismAccounts> prisms;
+    private final List<Contact> contacts;
+    private final List<Overlap> overlaps;
     private final Window window;
 
     private WaterBalance(Aquifer aquifer, List<Prism> prisms, WellRule rule) {
@@ -41,6 +45,18 @@ public final class WaterBalance {
         this.prisms = cuts.stream()
                 .map(cut -> new PrismAccounts(aquifer, cut, wells, rule))
                 .toList();
+        this.contacts = contacts();
+        this.overlaps = new Overlaps(aquifer.grid(), aquifer.layers().size(), aquifer::surface).of(prisms);
+    }
+
+    private List<Contact> contacts() {
+        List<Contact> found = new ArrayList<>();
+        for (int one = 0; one < prisms.size(); one++) {
+            for (int other = one + 1; other < prisms.size(); other++) {
+                Contact.between(prisms, one, other, aquifer.grid()).ifPresent(found::add);
+            }
+        }
+        return found;
     }
 
     /**
@@ -77,11 +93,11 @@ public final class WaterBalance {
 
     private Balance work(int threads, Progress progress) {
         Imbalance imbalance = new Imbalance(window, aquifer.layers().size());
-        List<Band> bands = bands().stream()
-                .map(rows -> new Band(aquifer, rows, prisms, wells, imbalance))
+        List<Band> bands = bands(window, aquifer.layers().size()).stream()
+                .map(rows -> new Band(aquifer, rows, prisms, contacts, wells, imbalance))
                 .toList();
         progress.begin("balancing", (long) bands.size() * aquifer.times().intervals());
-        BandResult total = new BandResult(prisms, aquifer.times().intervals());
+        BandResult total = new BandResult(prisms, contacts, aquifer.times().intervals());
         ExecutorService workers = Executors.newFixedThreadPool(threads, WaterBalance::daemon);
         try {
             Deque<Future<BandResult>> waiting = new ArrayDeque<>();
@@ -105,9 +121,10 @@ public final class WaterBalance {
         return new Balance(
                 ledgers(total),
                 prisms.stream().map(PrismAccounts::cut).toList(),
+                new ExchangeSheet(aquifer, prisms, contacts, overlaps, total).flows(),
                 imbalance,
                 prisms.stream().map(prism -> Whereabouts.of(prism, imbalance)).toList(),
-                RunNotes.of(aquifer, prisms, total));
+                RunNotes.of(aquifer, prisms, overlaps, total));
     }
 
     private static Thread daemon(Runnable work) {
@@ -117,8 +134,8 @@ public final class WaterBalance {
     }
 
     /** Bands of rows, aligned so that they fall together with the tiles of rasters. */
-    private List<Window> bands() {
-        int perRow = (window.columns() + 2) * aquifer.layers().size();
+    static List<Window> bands(Window window, int layers) {
+        int perRow = (window.columns() + 2) * layers;
         int height = Math.max(8, Integer.highestOneBit(Math.max(1, CELLS_IN_A_BAND / perRow)));
         List<Window> bands = new ArrayList<>();
         for (int row = window.row(); row < window.rowEnd(); ) {

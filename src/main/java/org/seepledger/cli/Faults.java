@@ -20,6 +20,11 @@ final class Faults {
     private Faults() {}
 
     static int report(Throwable fault, PrintStream err) {
+        if (isOutOfMemory(fault)) {
+            err.println(
+                    "The memory that Java may use is full. Give it more with java -Xmx4g, or choose smaller prisms.");
+            return PROGRAM;
+        }
         if (Boolean.getBoolean(TRACE)) {
             fault.printStackTrace(err);
         }
@@ -35,11 +40,6 @@ final class Faults {
             err.println("Stopped; nothing was written.");
             return CANCELLED;
         }
-        if (fault instanceof OutOfMemoryError) {
-            err.println(
-                    "The memory that Java may use is full. Give it more with java -Xmx4g, or choose smaller prisms.");
-            return PROGRAM;
-        }
         err.println("This is a fault of the program, not of the data: " + oneLine(fault)
                 + ". Nothing was written. Run again with java -D" + TRACE + "=true to see where.");
         return PROGRAM;
@@ -47,8 +47,18 @@ final class Faults {
 
     static int reportUsage(CommandLine.ParameterException fault, PrintStream err) {
         String command = fault.getCommandLine().getCommandSpec().qualifiedName();
-        err.println(fault.getMessage() + " See " + command + " --help.");
+        String nearest = fault instanceof CommandLine.UnmatchedArgumentException unmatched
+                ? unmatched.getSuggestions().stream()
+                        .findFirst()
+                        .map(name -> " Did you mean " + name + "?")
+                        .orElse("")
+                : "";
+        err.println(oneLine(fault) + "." + nearest + " See " + command + " --help.");
         return USAGE;
+    }
+
+    private static boolean isOutOfMemory(Throwable fault) {
+        return fault instanceof OutOfMemoryError || fault.getCause() != null && isOutOfMemory(fault.getCause());
     }
 
     private static String oneLine(Throwable fault) {

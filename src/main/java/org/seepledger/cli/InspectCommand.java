@@ -42,8 +42,7 @@ final class InspectCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        terminal.out()
-                .print(InspectJob.run(aquifer, BalanceCommand.checkedThreads(threads), terminal.progress(progress)));
+        terminal.out().print(InspectJob.run(aquifer, Choices.threads(threads), terminal.progress(progress)));
         return 0;
     }
 }

@@ -2,6 +2,7 @@ package org.seepledger.cli;
 
 import java.io.Console;
 import java.io.PrintStream;
+import java.io.PrintWriter;
 import java.nio.charset.Charset;
 import java.nio.charset.StandardCharsets;
 import java.util.Locale;
@@ -24,14 +25,16 @@ import picocli.CommandLine.IVersionProvider;
         name = "seepledger",
         description = "How much water comes into and goes out of a volume of your own choosing in a gridded aquifer,"
                 + " through each face, from each source and from storage, and how well it all closes.",
-        subcommands = {InspectCommand.class, BalanceCommand.class},
+        subcommands = {InspectCommand.class, BalanceCommand.class, TraceCommand.class, ExtractCommand.class},
         mixinStandardHelpOptions = true,
         versionProvider = Seepledger.ProgramVersion.class,
         synopsisSubcommandLabel = "COMMAND",
         footer = {
             "",
             "Try it on the sample aquifer:",
-            "  seepledger balance sample-aquifers/terrace --prisms sample-aquifers/terrace/prisms.geojson --out budget",
+            "  seepledger inspect sample-aquifers/terrace",
+            "  seepledger balance sample-aquifers/terrace \\",
+            "    --prisms sample-aquifers/terrace/prisms.geojson --out budget",
             "",
             "Exit status: 0 done; 1 a fault of the program; 2 the command line is wrong; 3 the data are wrong;",
             "4 done, but a closure error exceeds --max-closure-error."
@@ -90,11 +93,17 @@ public final class Seepledger {
                 if (type == BalanceCommand.class) {
                     return type.cast(new BalanceCommand(terminal));
                 }
+                if (type == TraceCommand.class) {
+                    return type.cast(new TraceCommand(terminal));
+                }
+                if (type == ExtractCommand.class) {
+                    return type.cast(new ExtractCommand(terminal));
+                }
                 return CommandLine.defaultFactory().create(type);
             }
         });
-        line.setOut(new java.io.PrintWriter(out, true));
-        line.setErr(new java.io.PrintWriter(err, true));
+        line.setOut(new PrintWriter(out, true));
+        line.setErr(new PrintWriter(err, true));
         line.setCaseInsensitiveEnumValuesAllowed(true);
         line.setUsageHelpWidth(100);
         line.setExecutionExceptionHandler((fault, command, parsed) -> Faults.report(fault, err));
@@ -103,6 +112,10 @@ public final class Seepledger {
             line.usage(out);
             return 2;
         }
-        return line.execute(arguments);
+        try {
+            return line.execute(arguments);
+        } catch (Error e) {
+            return Faults.report(e, err);
+        }
     }
 }

@@ -26,6 +26,7 @@ final class TerminalProgress implements Progress {
 
     @Override
     public synchronized void begin(String work, long count) {
+        stopIfAsked();
         what = work;
         steps = count;
         done = 0;
@@ -34,11 +35,15 @@ final class TerminalProgress implements Progress {
         err.println(what + ": " + steps + (steps == 1 ? " step" : " steps"));
     }
 
-    @Override
-    public synchronized void step() {
+    private void stopIfAsked() {
         if (interrupt.isAsked()) {
             throw new Cancelled();
         }
+    }
+
+    @Override
+    public synchronized void step() {
+        stopIfAsked();
         done++;
         long now = System.nanoTime();
         if (now - printed >= EVERY_NANOS && done < steps) {

@@ -49,8 +49,7 @@ public final class JsonFile {
         } catch (JsonProcessingException e) {
             throw malformed(e, shownFile);
         } catch (IOException e) {
-            throw new DataFault(
-                    shownFile, "", "what cannot be read (" + e.getMessage() + ")", "JSON", "Check the file.");
+            throw Unreadable.file(shownFile, e);
         }
     }
 
@@ -64,7 +63,7 @@ public final class JsonFile {
     private static DataFault malformed(JsonProcessingException e, String shownFile) {
         JsonLocation at = e.getLocation();
         String place = at == null ? "" : "line " + at.getLineNr() + ", column " + at.getColumnNr();
-        String what = e.getOriginalMessage();
+        String what = e.getOriginalMessage().replaceAll(", from `[^`]*`", "");
         String found = "a fault in the JSON (" + (what.length() > 300 ? what.substring(0, 300) + "…" : what) + ")";
         String expected = "JSON of at most " + DEEPEST + " levels and " + MOST_TOKENS + " tokens, keys not repeated";
         return new DataFault(shownFile, place, found, expected, "Correct the file there.");

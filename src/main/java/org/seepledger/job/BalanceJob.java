@@ -1,51 +1,45 @@
 package org.seepledger.job;
 
 import java.io.IOException;
-import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
-import java.util.Optional;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.balance.Balance;
 import org.seepledger.balance.Periods;
 import org.seepledger.balance.WaterBalance;
-import org.seepledger.fault.DataFault;
 import org.seepledger.fault.UsageFault;
-import org.seepledger.io.aquifer.AquiferFolder;
-import org.seepledger.io.aquifer.AquiferReader;
-import org.seepledger.io.prisms.PrismsReader;
+import org.seepledger.io.Unreadable;
 import org.seepledger.io.raster.GeoTiffWriter;
 import org.seepledger.io.result.BudgetCsv;
+import org.seepledger.io.result.ExchangeCsv;
 import org.seepledger.io.result.FacesGeoJson;
 import org.seepledger.io.result.FileRecord;
 import org.seepledger.io.result.PrismBudget;
 import org.seepledger.io.result.ResultUnits;
 import org.seepledger.io.result.RunJson;
 import org.seepledger.io.result.Statement;
-import org.seepledger.io.table.PeriodsTable;
 import org.seepledger.ledger.Ledger;
 import org.seepledger.ledger.Period;
 import org.seepledger.ledger.PeriodBudget;
-import org.seepledger.prism.Overlaps;
 import org.seepledger.prism.Prism;
 import org.seepledger.progress.Progress;
 import org.seepledger.report.BalanceSummary;
-import org.seepledger.report.Figures;
 
 /** The water budget of prisms: reads, balances, writes the result files. */
 public final class BalanceJob {
 
     private final BalanceRequest request;
+    private final Subject subject;
     private final Progress progress;
-    private final Stopwatch stopwatch = new Stopwatch();
-    private final List<String> warnings = new ArrayList<>();
-    private final List<String> notes = new ArrayList<>();
+    private final Stopwatch stopwatch;
 
-    private BalanceJob(BalanceRequest request, Progress progress) {
+    private BalanceJob(BalanceRequest request, Subject subject, Stopwatch stopwatch, Progress progress) {
         this.request = request;
+        this.subject = subject;
+        this.stopwatch = stopwatch;
         this.progress = progress;
     }
 
@@ -56,25 +50,24 @@ public final class BalanceJob {
      * @param progress told how far the work is
      * @return what it came to; the files are in place
      * @throws UsageFault if the request cannot be met
-     * @throws DataFault if the data are wrong; nothing is written then
+     * @throws org.seepledger.fault.DataFault if the data are wrong; nothing is written then
      * @throws org.seepledger.fault.ProgramFault if an identity that must hold does not; nothing is written then
      * @throws org.seepledger.progress.Cancelled if the work was stopped; nothing is written then
-     * @throws IOException if a file cannot be read or written
      */
-    public static BalanceOutcome run(BalanceRequest request, Progress progress) throws IOException {
+    public static BalanceOutcome run(BalanceRequest request, Progress progress) {
+        Stopwatch stopwatch = new Stopwatch();
         try (OutputFolder out = OutputFolder.at(request.out(), request.overwrite());
-                AquiferFolder folder = AquiferReader.open(request.aquifer())) {
-            return new BalanceJob(request, progress).run(folder, out);
+                Subject subject = Subject.open(request.aquifer(), request.prisms(), request.clip())) {
+            return new BalanceJob(request, subject, stopwatch, progress).run(out);
         }
     }
 
-    private BalanceOutcome run(AquiferFolder folder, OutputFolder out) throws IOException {
-        Aquifer aquifer = folder.aquifer();
-        warnings.addAll(folder.warnings());
-        notes.addAll(folder.notes());
-        ResultUnits units = units(aquifer);
-        List<Prism> prisms = prisms(folder);
-        List<Period> periods = periods(aquifer);
+    private BalanceOutcome run(OutputFolder out) {
+        Aquifer aquifer = subject.aquifer();
+        List<String> warnings = subject.warnings();
+        ResultUnits units = subject.units(request.rateUnit(), request.volumeUnit());
+        List<Prism> prisms = subject.prisms();
+        List<Period> periods = subject.periods(request.every(), request.periods(), request.waterYearStart());
         stopwatch.lap("reading");
         Balance balance = WaterBalance.of(aquifer, prisms, request.wells(), request.threads(), progress);
         stopwatch.lap("balancing");
@@ -83,78 +76,29 @@ public final class BalanceJob {
                 balance.ledgers().stream().map(ledger -> ledger.budget(whole)).toList();
         RunWarnings words = RunWarnings.of(aquifer, balance);
         warnings.addAll(words.warnings(records));
-        notes.addAll(words.remarks(request.wells()));
+        subject.notes().addAll(words.remarks(request.wells()));
         List<PrismBudget> budgets = balance.ledgers().stream()
                 .map(ledger -> budget(ledger, periods))
                 .toList();
         Statement statement = new Statement(
                 "Water budget of \"" + aquifer.name() + "\" by seepledger " + Version.text(),
-                inputs(folder),
-                folder.origins(),
+                subject.inputs(progress),
+                subject.folder().origins(),
                 warnings);
-        BudgetCsv.write(out.file("budget.csv"), statement, budgets, aquifer.times(), units);
-        FacesGeoJson.write(out.file("faces.geojson"), crs(folder), prisms, records, units);
-        writeImbalance(folder, balance, out);
-        writeRecord(out, statement, balance);
+        try {
+            BudgetCsv.write(out.file("budget.csv"), statement, budgets, aquifer.times(), units);
+            ExchangeCsv.write(out.file("exchange.csv"), statement, balance.exchange(), periods, aquifer.times(), units);
+            FacesGeoJson.write(out.file("faces.geojson"), subject.crs(), prisms, records, units);
+            writeImbalance(balance, out);
+            writeRecord(out, statement, balance);
+        } catch (IOException e) {
+            throw new UsageFault("The results cannot be written beside " + request.out() + " (" + Unreadable.reason(e)
+                    + "). Make room or name another folder.");
+        }
         List<String> files = out.written();
         out.publish();
-        String summary = BalanceSummary.of(aquifer, balance, budgets, units, warnings);
+        String summary = BalanceSummary.of(aquifer, balance, budgets, units, warnings, subject.notes());
         return new BalanceOutcome(summary, worst(budgets), files);
-    }
-
-    private ResultUnits units(Aquifer aquifer) {
-        try {
-            return ResultUnits.of(
-                    aquifer.lengthUnit(),
-                    aquifer.timeUnit(),
-                    request.rateUnit().orElse(null),
-                    request.volumeUnit().orElse(null));
-        } catch (IllegalArgumentException e) {
-            throw new UsageFault(
-                    "The unit asked for does not fit: " + e.getMessage() + ". Give a rate as m3/d and a volume as m3.");
-        }
-    }
-
-    private List<Prism> prisms(AquiferFolder folder) {
-        Aquifer aquifer = folder.aquifer();
-        List<Prism> prisms = new PrismsReader(
-                        folder.crs(),
-                        aquifer.grid(),
-                        aquifer.layers().size(),
-                        request.clip(),
-                        (path, shown) -> {
-                            throw notYet(shown);
-                        },
-                        notes::add)
-                .read(request.prisms(), request.prisms().toString());
-        prisms.stream()
-                .filter(prism -> !(prism.range() instanceof org.seepledger.prism.VerticalRange.Layers))
-                .findFirst()
-                .ifPresent(prism -> {
-                    throw notYet("prism \"" + prism.name() + "\"");
-                });
-        new Overlaps(aquifer.grid(), aquifer.layers().size(), aquifer::surface)
-                .of(prisms)
-                .forEach(overlap -> warnings.add("\"" + overlap.first() + "\" and \"" + overlap.second()
-                        + "\" overlap over " + Figures.shown(overlap.area()) + " " + aquifer.lengthUnit()
-                        + "2: what lies in both counts in both."));
-        return prisms;
-    }
-
-    private DataFault notYet(String place) {
-        return new DataFault(
-                request.prisms().toString(),
-                place,
-                "a top or bottom given as elevation or surface, which this version does not cut at yet",
-                "a range of layers",
-                "Give \"layers\": [first, last].");
-    }
-
-    private List<Period> periods(Aquifer aquifer) {
-        Periods periods = new Periods(aquifer.times());
-        return request.periods()
-                .map(file -> periods.named(PeriodsTable.read(file, file.toString(), aquifer.times(), warnings::add)))
-                .orElseGet(() -> periods.every(request.every(), request.waterYearStart()));
     }
 
     private static PrismBudget budget(Ledger ledger, List<Period> periods) {
@@ -162,33 +106,14 @@ public final class BalanceJob {
                 ledger.prism(), periods.stream().map(ledger::budget).toList());
     }
 
-    private List<FileRecord> inputs(AquiferFolder folder) throws IOException {
-        Map<String, Path> files = new LinkedHashMap<>(folder.inputs());
-        files.put(request.prisms().toString(), request.prisms());
-        request.periods().ifPresent(file -> files.put(file.toString(), file));
-        progress.begin("fingerprinting inputs", files.size());
-        List<FileRecord> records = new ArrayList<>();
-        for (Map.Entry<String, Path> file : files.entrySet()) {
-            records.add(FileRecord.of(file.getKey(), file.getValue()));
-            progress.step();
-        }
-        return records;
-    }
-
-    private static Optional<String> crs(AquiferFolder folder) {
-        return folder.crs().isLocal()
-                ? Optional.empty()
-                : folder.crs().code().or(() -> Optional.of(folder.crs().wkt()));
-    }
-
-    private void writeImbalance(AquiferFolder folder, Balance balance, OutputFolder out) throws IOException {
+    private void writeImbalance(Balance balance, OutputFolder out) throws IOException {
         for (int layer = 0; layer < balance.imbalance().layers(); layer++) {
             int index = layer;
             GeoTiffWriter.write(
                     out.file("imbalance_l" + (layer + 1) + ".tif"),
-                    folder.aquifer().grid(),
+                    subject.aquifer().grid(),
                     balance.imbalance().window(),
-                    crs(folder),
+                    subject.crs(),
                     row -> balance.imbalance().row(index, row));
         }
     }
@@ -201,8 +126,8 @@ public final class BalanceJob {
         stopwatch.lap("writing");
         Map<String, Double> checks =
                 Map.of("largest_difference_between_routes", balance.notes().disagreement());
-        RunJson.Run run =
-                new RunJson.Run(Version.text(), "balance", options(), statement, notes, checks, stopwatch.seconds());
+        RunJson.Run run = new RunJson.Run(
+                Version.text(), "balance", options(), statement, subject.notes(), checks, stopwatch.seconds());
         RunJson.write(out.file(RunJson.NAME), run, outputs);
     }
 

@@ -1,19 +1,21 @@
 package org.seepledger.job;
 
-import com.fasterxml.jackson.databind.JsonNode;
 import java.io.IOException;
 import java.io.UncheckedIOException;
+import java.nio.file.AccessDeniedException;
 import java.nio.file.Files;
+import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
 import java.util.stream.Stream;
 import org.seepledger.fault.DataFault;
 import org.seepledger.fault.UsageFault;
-import org.seepledger.io.JsonFile;
+import org.seepledger.io.Unreadable;
 import org.seepledger.io.result.RunJson;
 
 /**
@@ -24,11 +26,13 @@ final class OutputFolder implements AutoCloseable {
 
     private final Path target;
     private final Path aside;
+    private final List<Path> made;
     private final Set<String> replaceable;
 
-    private OutputFolder(Path target, Path aside, Set<String> replaceable) {
+    private OutputFolder(Path target, Path aside, List<Path> made, Set<String> replaceable) {
         this.target = target;
         this.aside = aside;
+        this.made = made;
         this.replaceable = replaceable;
     }
 
@@ -44,13 +48,39 @@ final class OutputFolder implements AutoCloseable {
     static OutputFolder at(Path target, boolean overwrite) {
         Path absolute = target.toAbsolutePath().normalize();
         Set<String> replaceable = replaceable(target, overwrite);
+        List<Path> made = missing(absolute.getParent());
         try {
             Files.createDirectories(absolute.getParent());
             String name = "." + absolute.getFileName() + "-building-";
-            return new OutputFolder(absolute, Files.createTempDirectory(absolute.getParent(), name), replaceable);
+            Path aside = Files.createTempDirectory(absolute.getParent(), name);
+            if (Files.isDirectory(absolute) && !Files.isWritable(absolute)) {
+                Files.delete(aside);
+                throw new AccessDeniedException(target.toString());
+            }
+            return new OutputFolder(absolute, aside, made, replaceable);
         } catch (IOException e) {
-            throw new UsageFault("The output folder " + target + " cannot be written beside: " + e.getMessage()
-                    + ". Name a folder where you may write.");
+            removeEmpty(made);
+            throw new UsageFault("The output folder " + target + " cannot be used (" + Unreadable.reason(e)
+                    + "). Name a folder where you may write.");
+        }
+    }
+
+    /** The folders above the target that do not exist yet, the innermost first. */
+    private static List<Path> missing(Path parent) {
+        List<Path> missing = new ArrayList<>();
+        for (Path folder = parent; folder != null && Files.notExists(folder); folder = folder.getParent()) {
+            missing.add(folder);
+        }
+        return missing;
+    }
+
+    private static void removeEmpty(List<Path> folders) {
+        try {
+            for (Path folder : folders) {
+                Files.deleteIfExists(folder);
+            }
+        } catch (IOException inUse) {
+            // Somebody else put something there meanwhile: it stays.
         }
     }
 
@@ -58,7 +88,7 @@ final class OutputFolder implements AutoCloseable {
         if (Files.exists(target) && !Files.isDirectory(target)) {
             throw new UsageFault("The output folder " + target + " is a file. Name a new or empty folder.");
         }
-        if (names(target).isEmpty()) {
+        if (isEmpty(target)) {
             return Set.of();
         }
         if (!overwrite) {
@@ -74,39 +104,75 @@ final class OutputFolder implements AutoCloseable {
         return recorded(record);
     }
 
-    /** The plain file names that an earlier run's record lists; anything else in it is not ours to touch. */
+    /** The files below the folder that an earlier run's record lists; anything else in it is not ours to touch. */
     private static Set<String> recorded(Path record) {
         Set<String> names = new LinkedHashSet<>();
         names.add(RunJson.NAME);
         try {
-            JsonNode outputs = JsonFile.read(record, record.toString()).path(RunJson.OUTPUTS);
-            outputs.forEach(output -> {
-                String name = output.path("name").asText();
-                if (name.matches("[A-Za-z0-9_.-]+") && !name.startsWith(".")) {
-                    names.add(name);
-                }
-            });
+            RunJson.outputs(record).stream()
+                    .filter(name -> isBelow(record.toAbsolutePath().getParent(), name))
+                    .filter(name -> !Files.isDirectory(record.resolveSibling(name)))
+                    .forEach(names::add);
         } catch (DataFault e) {
-            throw new UsageFault("The run record in the output folder cannot be read: " + e.getMessage()
-                    + " Name a new or empty folder.");
+            throw new UsageFault(
+                    "The output folder holds no run record that can be read, so no earlier run's files can be told"
+                            + " apart: " + e.getMessage() + " Name a new or empty folder.");
         }
         return names;
     }
 
-    private static List<String> names(Path folder) {
-        if (!Files.isDirectory(folder)) {
-            return List.of();
-        }
-        try (Stream<Path> files = Files.list(folder)) {
-            return files.map(file -> file.getFileName().toString()).sorted().toList();
-        } catch (IOException e) {
-            throw new UsageFault("The output folder " + folder + " cannot be read: " + e.getMessage());
+    /** Whether a folder that stands at the target already is a link to elsewhere. */
+    private boolean leadsAway(String name) {
+        return Files.isDirectory(target.resolve(name).getParent()) && !isBelow(target, name);
+    }
+
+    private static boolean isBelow(Path folder, String name) {
+        try {
+            Path file = folder.resolve(name);
+            boolean plain = !name.isEmpty()
+                    && List.of(name.split("/", -1)).stream().noneMatch(step -> step.isEmpty() || step.startsWith("."));
+            return plain
+                    && file.normalize().startsWith(folder)
+                    && Files.isDirectory(file.getParent())
+                    && file.getParent().toRealPath().startsWith(folder.toRealPath());
+        } catch (IOException | InvalidPathException e) {
+            return false;
         }
     }
 
-    /** Where a file is to be written while the run lasts. */
-    Path file(String name) {
-        return aside.resolve(name);
+    private static boolean isEmpty(Path folder) {
+        if (!Files.isDirectory(folder)) {
+            return true;
+        }
+        try (Stream<Path> files = Files.list(folder)) {
+            return files.findAny().isEmpty();
+        } catch (IOException e) {
+            throw new UsageFault("The output folder " + folder + " cannot be read (" + Unreadable.reason(e)
+                    + "). Name a folder where you may read and write.");
+        }
+    }
+
+    private static List<String> names(Path folder) {
+        try (Stream<Path> files = Files.walk(folder)) {
+            return files.filter(file -> !Files.isDirectory(file))
+                    .map(file -> folder.relativize(file).toString().replace('\\', '/'))
+                    .sorted()
+                    .toList();
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
+    }
+
+    /**
+     * Where a file is to be written while the run lasts.
+     *
+     * @param name its name, with {@code /} between folders
+     * @throws IOException if its folder cannot be made
+     */
+    Path file(String name) throws IOException {
+        Path file = aside.resolve(name);
+        Files.createDirectories(file.getParent());
+        return file;
     }
 
     /** The names of the files written so far. */
@@ -124,7 +190,8 @@ final class OutputFolder implements AutoCloseable {
         files.remove(RunJson.NAME);
         files.add(RunJson.NAME);
         for (String name : files) {
-            if (Files.exists(target.resolve(name)) && !replaceable.contains(name)) {
+            boolean free = !Files.exists(target.resolve(name)) && !leadsAway(name);
+            if (!free && !replaceable.contains(name)) {
                 throw new UsageFault("The file " + target.resolve(name)
                         + " is in the way, and no earlier run wrote it. Move it or name another folder.");
             }
@@ -132,6 +199,7 @@ final class OutputFolder implements AutoCloseable {
         try {
             Files.createDirectories(target);
             for (String name : files) {
+                Files.createDirectories(target.resolve(name).getParent());
                 Files.move(file(name), target.resolve(name), StandardCopyOption.REPLACE_EXISTING);
             }
             for (String old : replaceable) {
@@ -140,19 +208,26 @@ final class OutputFolder implements AutoCloseable {
                 }
             }
         } catch (IOException e) {
-            throw new UsageFault("The files cannot be moved to " + target + ": " + e.getMessage());
+            throw new UsageFault(
+                    "The files cannot be moved to " + target + " (" + Unreadable.reason(e) + "). Name another folder.");
         }
     }
 
     @Override
     public void close() {
         try {
-            for (String name : written()) {
-                Files.deleteIfExists(file(name));
+            List<Path> left;
+            try (Stream<Path> files = Files.walk(aside)) {
+                left = files.sorted(Comparator.reverseOrder()).toList();
             }
-            Files.deleteIfExists(aside);
+            for (Path file : left) {
+                Files.deleteIfExists(file);
+            }
         } catch (IOException e) {
             throw new UncheckedIOException(e);
+        }
+        if (!Files.exists(target)) {
+            removeEmpty(made);
         }
     }
 }

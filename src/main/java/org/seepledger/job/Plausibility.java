@@ -2,7 +2,6 @@ package org.seepledger.job;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Set;
 import org.seepledger.report.Figures;
 import org.seepledger.report.ValueRange;
 import org.seepledger.unit.Measure;
@@ -13,12 +12,6 @@ import org.seepledger.unit.Measure;
  */
 final class Plausibility {
 
-    /** Values that programs commonly write for "no value". */
-    private static final Set<Double> MARKS =
-            Set.of(-999.0, -9999.0, -99999.0, -999.99, -32768.0, 9999.0, 99999.0, 1e20, -1e20, 1e30, -1e30, -888.0);
-
-    private static final double BEYOND_ANY_VALUE = 1e19;
-
     /** Specific discharge beyond this is rather a velocity, or in another unit (common practice). */
     private static final double FAST_METRES_A_DAY = 100;
 
@@ -26,6 +19,12 @@ final class Plausibility {
     private static final double WET_METRES_A_YEAR = 12;
 
     private static final double THICK_METRES = 10_000;
+
+    /** The greatest of medium to coarse sand and gravel (Johnson 1967, USGS Water-Supply Paper 1662-D). */
+    private static final double MOST_SPECIFIC_YIELD = 0.35;
+
+    /** The greatest of plastic clay, per metre (Domenico 1972). */
+    private static final double MOST_SPECIFIC_STORAGE = 2e-2;
 
     private final List<String> doubts = new ArrayList<>();
 
@@ -43,8 +42,8 @@ final class Plausibility {
             doubts.add("\"" + range.name() + "\" has no value anywhere.");
             return;
         }
-        checkMark(range, range.least(), range.leastAt());
-        checkMark(range, range.greatest(), range.greatestAt());
+        checkMark(range, unit, range.least(), range.leastAt());
+        checkMark(range, unit, range.greatest(), range.greatestAt());
         if (unit.isCompatible(Measure.of("m/d"))) {
             checkFlux(range, unit);
         }
@@ -54,17 +53,35 @@ final class Plausibility {
         if (range.name().contains("of layer") && size(range) * unit.in(Measure.of("m")) > THICK_METRES) {
             doubts.add("\"" + range.name() + "\" reaches " + shown(range) + ": check its unit.");
         }
-        boolean fraction = range.name().equals("specific yield");
-        if (fraction && (range.least() < 0 || range.greatest() > 1)) {
-            doubts.add("\"" + range.name() + "\" goes from " + Figures.shown(range.least()) + " to "
-                    + Figures.shown(range.greatest()) + ": it is a fraction between 0 and 1.");
+        switch (range.name()) {
+            case "specific yield", "storativity" -> checkFraction(range);
+            case "specific storage" -> checkSpecificStorage(range, unit);
+            default -> {}
         }
     }
 
-    private void checkMark(ValueRange range, double value, String at) {
-        if (MARKS.contains(value) || Math.abs(value) > BEYOND_ANY_VALUE) {
-            doubts.add("\"" + range.name() + "\" is " + value + " at " + at
-                    + ": that looks like a mark for \"no value\" that the file does not declare.");
+    private void checkMark(ValueRange range, Measure unit, double value, String at) {
+        NoValueMarks.in(value, unit)
+                .ifPresent(mark -> doubts.add("\"" + range.name() + "\" is " + mark + " at " + at
+                        + ": that looks like a mark for \"no value\" that the file does not declare."));
+    }
+
+    private void checkFraction(ValueRange range) {
+        if (range.least() < 0 || range.greatest() > 1) {
+            doubts.add("\"" + range.name() + "\" goes from " + Figures.shown(range.least()) + " to "
+                    + Figures.shown(range.greatest()) + ": it is a fraction between 0 and 1.");
+        } else if (range.greatest() > MOST_SPECIFIC_YIELD) {
+            doubts.add("\"" + range.name() + "\" reaches " + Figures.shown(range.greatest()) + " at "
+                    + range.greatestAt() + ": more than " + MOST_SPECIFIC_YIELD + " is hardly ever found.");
+        }
+    }
+
+    private void checkSpecificStorage(ValueRange range, Measure unit) {
+        double greatest = range.greatest() * unit.in(Measure.of("1/m"));
+        if (range.least() < 0 || greatest > MOST_SPECIFIC_STORAGE) {
+            doubts.add("\"" + range.name() + "\" reaches " + shown(range)
+                    + ": it is hardly ever negative or more than " + MOST_SPECIFIC_STORAGE
+                    + " per metre; check its unit, and that it is not storativity.");
         }
     }
 

@@ -16,6 +16,7 @@ import org.seepledger.ledger.Account;
 import org.seepledger.ledger.Entry;
 import org.seepledger.ledger.Group;
 import org.seepledger.ledger.PeriodBudget;
+import org.seepledger.prism.Overlap;
 import org.seepledger.report.Figures;
 
 /** Puts into words what the reader of a balance must know. */
@@ -39,6 +40,11 @@ final class RunWarnings {
             warnings.add(
                     "Change in storage is not known (heads or storage coefficients are missing): storage, residual and"
                             + " closure errors are left empty.");
+        }
+        for (Overlap overlap : notes.overlaps()) {
+            warnings.add("\"" + overlap.first() + "\" and \"" + overlap.second() + "\" overlap over "
+                    + Figures.shown(overlap.area()) + " " + aquifer.lengthUnit()
+                    + "2: what lies in both counts in both, and their exchange is left empty.");
         }
         for (RunNotes.ClosedSide side : notes.closedSides()) {
             warnings.add(

@@ -14,6 +14,8 @@ public final class Coverage {
     private final Window window;
     private final int[] firstColumns;
     private final double[][] shares;
+    private final double[][] westFaces;
+    private final double[][] southFaces;
     private final boolean[][] cut;
 
     Coverage(Pieces pieces) {
@@ -21,6 +23,8 @@ public final class Coverage {
         int south = pieces.row(pieces.count() - 1);
         firstColumns = new int[south - north + 1];
         shares = new double[firstColumns.length][];
+        westFaces = new double[firstColumns.length][];
+        southFaces = new double[firstColumns.length][];
         cut = new boolean[firstColumns.length][];
         int west = Integer.MAX_VALUE;
         int east = 0;
@@ -32,6 +36,27 @@ public final class Coverage {
             }
         }
         window = new Window(north, west, firstColumns.length, east - west);
+        fillSouthFaces(pieces);
+    }
+
+    /** Goes from north to south in all columns at once: what lies north of a face and covers it, less what does not. */
+    private void fillSouthFaces(Pieces pieces) {
+        double[] cover = new double[window.columns()];
+        int piece = 0;
+        for (int row = window.row(); row < window.rowEnd(); row++) {
+            int index = row - window.row();
+            while (piece < pieces.count() && pieces.row(piece) == row) {
+                cover[pieces.column(piece) - window.column()] -= pieces.across(piece);
+                piece++;
+            }
+            double[] faces = new double[shares[index].length];
+            for (int place = 0; place < faces.length; place++) {
+                int column = firstColumns[index] + place - window.column();
+                cover[column] = cut[index][place] ? cover[column] : Math.rint(cover[column]);
+                faces[place] = cover[column];
+            }
+            southFaces[index] = faces;
+        }
     }
 
     private void fillRow(Pieces pieces, int row, int index) {
@@ -57,9 +82,11 @@ public final class Coverage {
             cover = touched[place] ? cover : Math.rint(cover);
             toTheWest[place] += cover;
             cover += rise[place];
+            rise[place] = cover;
         }
         firstColumns[index] = west;
         shares[index] = toTheWest;
+        westFaces[index] = rise;
         cut[index] = touched;
     }
 
@@ -97,6 +124,28 @@ public final class Coverage {
     public double share(int row, int column) {
         int place = place(row, column);
         return place < 0 ? 0 : shares[row - window.row()][place];
+    }
+
+    /**
+     * {@return the share of a cell's west face that lies strictly inside the prism}
+     *
+     * @param row any row of the grid
+     * @param column any column of the grid
+     */
+    public double westFace(int row, int column) {
+        int place = place(row, column);
+        return place < 0 ? 0 : westFaces[row - window.row()][place];
+    }
+
+    /**
+     * {@return the share of a cell's north face that lies strictly inside the prism}
+     *
+     * @param row any row of the grid
+     * @param column any column of the grid
+     */
+    public double northFace(int row, int column) {
+        int place = place(row - 1, column);
+        return place < 0 ? 0 : southFaces[row - 1 - window.row()][place];
     }
 
     /**

@@ -169,14 +169,12 @@ public final class Pieces {
      * @param lastColumn the grid's last column
      */
     boolean isOnEdge(int piece, int lastRow, int lastColumn) {
-        return lies(startAcross, endAcross, piece, 0) && columns[piece] == 0
-                || lies(startAcross, endAcross, piece, 1) && columns[piece] == lastColumn
-                || lies(startUp, endUp, piece, 1) && rows[piece] == 0
-                || lies(startUp, endUp, piece, 0) && rows[piece] == lastRow;
-    }
-
-    private static boolean lies(double[] starts, double[] ends, int piece, double at) {
-        return starts[piece] == at && ends[piece] == at;
+        double across = onLineAcross(piece);
+        double up = onLineUp(piece);
+        return across == 0 && columns[piece] == 0
+                || across == 1 && columns[piece] == lastColumn
+                || up == 1 && rows[piece] == 0
+                || up == 0 && rows[piece] == lastRow;
     }
 
     /**
@@ -189,5 +187,35 @@ public final class Pieces {
      */
     double shareBehind(int piece, double across, double up) {
         return new Sector(across, up).behind(startAcross[piece], startUp[piece], endAcross[piece], endUp[piece]);
+    }
+
+    double startAcross(int piece) {
+        return startAcross[piece];
+    }
+
+    double startUp(int piece) {
+        return startUp[piece];
+    }
+
+    double endAcross(int piece) {
+        return endAcross[piece];
+    }
+
+    double endUp(int piece) {
+        return endUp[piece];
+    }
+
+    /** Which line along y the piece lies on, 0 for the west face of its cell, 1 for the east; NaN if on neither. */
+    double onLineAcross(int piece) {
+        return onLine(startAcross[piece], endAcross[piece]);
+    }
+
+    /** Which line along x the piece lies on, 0 for the south face of its cell, 1 for the north; NaN if on neither. */
+    double onLineUp(int piece) {
+        return onLine(startUp[piece], endUp[piece]);
+    }
+
+    private static double onLine(double start, double end) {
+        return start == end && (start == 0 || start == 1) ? start : Double.NaN;
     }
 }

@@ -57,8 +57,8 @@ public final class PrismCut {
             double[] ys = new double[xs.length];
             for (int i = 0; i < xs.length; i++) {
                 Side side = ring.sides().get(i);
-                xs[i] = grid.x().snapped(grid.localX(side.x(), side.y()));
-                ys[i] = grid.y().snapped(grid.localY(side.x(), side.y()));
+                xs[i] = grid.snappedX(side.x(), side.y());
+                ys[i] = grid.snappedY(side.x(), side.y());
             }
             for (int i = 0; i < xs.length; i++) {
                 int next = (i + 1) % xs.length;

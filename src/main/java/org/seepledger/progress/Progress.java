@@ -17,6 +17,7 @@ public interface Progress {
      *
      * @param what what is being done, in the user's words
      * @param steps how many steps it has
+     * @throws Cancelled if the work is to stop
      */
     void begin(String what, long steps);
 

@@ -18,7 +18,8 @@ import org.seepledger.ledger.Ledger;
 import org.seepledger.ledger.PeriodBudget;
 import org.seepledger.ledger.Totals;
 
-/** The summary of a balance on the terminal: first whether it closes, then what dominates, then where it does not. */
+/** The summary of a balance on the terminal: first the warnings, then for each prism
+ * whether it closes, what dominates, and where it does not. */
 public final class BalanceSummary {
 
     private static final int TERMS_SHOWN = 6;
@@ -56,13 +57,19 @@ public final class BalanceSummary {
      * @param budgets the budgets by period, for the worst of them
      * @param units the units to show
      * @param warnings what the reader must know
+     * @param notes lesser remarks
      */
     public static String of(
-            Aquifer aquifer, Balance balance, List<PrismBudget> budgets, ResultUnits units, List<String> warnings) {
-        return new BalanceSummary(aquifer, balance, budgets, units).write(warnings);
+            Aquifer aquifer,
+            Balance balance,
+            List<PrismBudget> budgets,
+            ResultUnits units,
+            List<String> warnings,
+            List<String> notes) {
+        return new BalanceSummary(aquifer, balance, budgets, units).write(warnings, notes);
     }
 
-    private String write(List<String> warnings) {
+    private String write(List<String> warnings, List<String> notes) {
         int intervals = aquifer.times().intervals();
         int prisms = balance.ledgers().size();
         text.append("Water budget of \"").append(aquifer.name()).append("\": ");
@@ -73,15 +80,20 @@ public final class BalanceSummary {
         text.append(Figures.shown(aquifer.times().instant(0))).append(" to ");
         text.append(Figures.shown(aquifer.times().instant(intervals))).append(' ');
         text.append(aquifer.timeUnit()).append(". Rates are means over the record.\n");
+        writeList("Warnings", warnings);
         for (int prism = 0; prism < prisms; prism++) {
             writePrism(prism);
         }
-        if (!warnings.isEmpty()) {
-            text.append("\nWarnings\n");
-            warnings.forEach(warning -> text.append("  - ").append(warning).append('\n'));
-        }
+        writeList("Notes", notes);
         text.append('\n').append(Disclaimer.text()).append('\n');
         return text.toString();
+    }
+
+    private void writeList(String title, List<String> lines) {
+        if (!lines.isEmpty()) {
+            text.append('\n').append(title).append('\n');
+            lines.forEach(line -> text.append("  - ").append(line).append('\n'));
+        }
     }
 
     private static String counted(int count, String what) {

@@ -3,7 +3,6 @@ package org.seepledger.report;
 import java.util.List;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.Axis;
-import org.seepledger.aquifer.DarcyFlux;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.Layer;
 import org.seepledger.balance.Balance;
@@ -81,11 +80,7 @@ public final class InspectionText {
                 grid.columns() + " columns of " + sizes(grid.x()) + ", " + grid.rows() + " rows of " + sizes(grid.y())
                         + (grid.rotation() == 0 ? "" : ", turned " + Figures.shown(grid.rotation()) + " degrees"));
         facts.fact("times", times());
-        facts.fact(
-                "flow",
-                aquifer.flow() instanceof DarcyFlux
-                        ? "specific discharge at cell centres"
-                        : "volumetric flow through cell faces");
+        facts.fact("flow", aquifer.flow().given());
         facts.fact(
                 "heads",
                 aquifer.head()

@@ -1,5 +1,8 @@
 package org.seepledger.aquifer;
 
+import java.util.Arrays;
+import java.util.List;
+
 /** Values from arrays, for tests: {@code values[step][layer][row * columns + column]}. */
 public record ArrayValues(int columns, double[][][] values) implements GriddedValues {
 
@@ -15,6 +18,16 @@ public record ArrayValues(int columns, double[][][] values) implements GriddedVa
             int start = (window.row() + row) * columns + window.column();
             System.arraycopy(from, start, target, offset + row * window.columns(), window.columns());
         }
+    }
+
+    /** Each array counts as a file of its own; a dry cell's infinite head as a number that nothing is multiplied by. */
+    @Override
+    public List<Stored> stored(int layer, int step, Window window) {
+        double[] block = new double[window.size()];
+        read(layer, step, window, block, 0);
+        Arrays.setAll(block, i -> Double.isInfinite(block[i]) ? -999 : block[i]);
+        String place = "step " + (changes() ? step : 0) + ", layer " + (layered() ? layer : 0);
+        return List.of(new Stored("array " + System.identityHashCode(values), place, false, block, 1));
     }
 
     @Override

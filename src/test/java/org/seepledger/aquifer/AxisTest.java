@@ -60,20 +60,20 @@ class AxisTest {
         "2, 2",
     })
     void aPlaceAsGoodAsOnAnEdgeIsPutOnIt(double distance, double snapped) {
-        assertThat(AXIS.snapped(distance)).isEqualTo(snapped);
+        assertThat(AXIS.snapped(distance, Axis.SNAP)).isEqualTo(snapped);
     }
 
     @Test
     void holdsItsEndsAndWhatRoundingPutsBeyondThem() {
         assertThat(AXIS.holds(0, 0)).isTrue();
         assertThat(AXIS.holds(7, 0)).isTrue();
-        assertThat(AXIS.holds(-0.9e-9, 0)).isTrue();
-        assertThat(AXIS.holds(-1.1e-9, 0)).isFalse();
+        assertThat(AXIS.holds(-0.9e-9, 1e-9)).isTrue();
+        assertThat(AXIS.holds(-1.1e-9, 1e-9)).isFalse();
         assertThat(AXIS.holds(-1.1e-9, 1e-8)).isTrue();
-        assertThat(AXIS.holds(7 + 3.9e-9, 0)).isTrue();
-        assertThat(AXIS.holds(7 + 4.1e-9, 0)).isFalse();
-        assertThat(AXIS.holds(7 + 0.9e-8, 1e-8)).isTrue();
-        assertThat(AXIS.holds(7 + 1.1e-8, 1e-8)).isFalse();
+        assertThat(AXIS.holds(7 + 3.9e-9, 1e-9)).isTrue();
+        assertThat(AXIS.holds(7 + 4.1e-9, 1e-9)).isFalse();
+        assertThat(AXIS.holds(7 + 3.9e-8, 1e-8)).isTrue();
+        assertThat(AXIS.holds(7 + 4.1e-8, 1e-8)).isFalse();
     }
 
     @Test

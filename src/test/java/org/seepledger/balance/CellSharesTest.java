@@ -152,9 +152,7 @@ class CellSharesTest {
     private static Coordinate[] closed(Ring ring, Grid grid) {
         List<Coordinate> vertices = new ArrayList<>();
         for (Side side : ring.sides()) {
-            vertices.add(new Coordinate(
-                    grid.x().snapped(grid.localX(side.x(), side.y())),
-                    grid.y().snapped(grid.localY(side.x(), side.y()))));
+            vertices.add(new Coordinate(grid.snappedX(side.x(), side.y()), grid.snappedY(side.x(), side.y())));
         }
         vertices.add(vertices.get(0).copy());
         return vertices.toArray(Coordinate[]::new);

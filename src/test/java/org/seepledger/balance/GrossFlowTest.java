@@ -58,10 +58,10 @@ class GrossFlowTest {
         Line(Grid grid, Side from, Side to) {
             this(
                     grid,
-                    grid.x().snapped(grid.localX(from.x(), from.y())),
-                    grid.y().snapped(grid.localY(from.x(), from.y())),
-                    grid.x().snapped(grid.localX(to.x(), to.y())),
-                    grid.y().snapped(grid.localY(to.x(), to.y())));
+                    grid.snappedX(from.x(), from.y()),
+                    grid.snappedY(from.x(), from.y()),
+                    grid.snappedX(to.x(), to.y()),
+                    grid.snappedY(to.x(), to.y()));
         }
 
         double[] inAndOut(FaceFlows flows, int layer) {

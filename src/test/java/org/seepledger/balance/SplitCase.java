@@ -3,6 +3,9 @@ package org.seepledger.balance;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Random;
+import net.jqwik.api.Assume;
+import org.locationtech.jts.geom.Coordinate;
+import org.locationtech.jts.geom.GeometryFactory;
 import org.seepledger.aquifer.Axis;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.prism.Prism;
@@ -39,6 +42,8 @@ final class SplitCase {
             outer.add("outer " + (i + 1));
         }
         int turn = corners / 2;
+        Assume.that(isSimple(star) && isSimple(joined(star.subList(0, turn + 1), centre)));
+        Assume.that(isSimple(joined(joined(star.subList(turn, corners), star.get(0)), centre)));
         int last = dice.nextInt(random.layers);
         whole = prism("whole", last, star, outer);
         List<double[]> one = new ArrayList<>(star.subList(0, turn + 1));
@@ -52,6 +57,20 @@ final class SplitCase {
         other.add(centre);
         otherItems.addAll(List.of("cut 1", "cut 2"));
         second = prism("second", last, other, otherItems);
+    }
+
+    private static List<double[]> joined(List<double[]> vertices, double[] last) {
+        List<double[]> all = new ArrayList<>(vertices);
+        all.add(last);
+        return all;
+    }
+
+    /** Whether a polygon does not cross itself, which prisms must not. */
+    private static boolean isSimple(List<double[]> vertices) {
+        Coordinate[] closed = joined(vertices, vertices.get(0)).stream()
+                .map(vertex -> new Coordinate(vertex[0], vertex[1]))
+                .toArray(Coordinate[]::new);
+        return new GeometryFactory().createPolygon(closed).isValid();
     }
 
     /** A place in map coordinates, now and then moved to the nearest grid lines. */

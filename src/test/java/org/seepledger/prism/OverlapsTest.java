@@ -2,6 +2,7 @@ package org.seepledger.prism;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
@@ -108,7 +109,7 @@ class OverlapsTest {
         GriddedValues surface = new GriddedValues() {
             @Override
             public void read(int layer, int step, Window window, double[] target, int offset) {
-                java.util.Arrays.fill(target, offset, offset + window.size(), 5);
+                Arrays.fill(target, offset, offset + window.size(), 5);
                 if (window.contains(row, column)) {
                     target[offset + window.index(row, column)] = 25;
                 }

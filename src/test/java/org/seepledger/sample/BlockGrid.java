@@ -154,6 +154,11 @@ final class BlockGrid {
         return topElevation(cell) - bottomElevation(cell);
     }
 
+    /** The top of the first layer (0), or the bottom of a layer (from 1): an elevation per cell in plan. */
+    double[] surface(int index) {
+        return surfaces[index].clone();
+    }
+
     /** The cell of the first layer at a place that lies on no cell's edge. */
     int cellAt(double x, double y) {
         int column = -Arrays.binarySearch(columnEdges, x) - 2;

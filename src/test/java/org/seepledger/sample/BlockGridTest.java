@@ -2,6 +2,7 @@ package org.seepledger.sample;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
 
 class BlockGridTest {
@@ -26,7 +27,7 @@ class BlockGridTest {
     void everyFaceIsCountedOnce() {
         // Across x 4 × 2 × 2, across y 3 × 3 × 2, across z 3 × 2 × 3.
         assertThat(grid.faces()).isEqualTo(16 + 18 + 18);
-        long outer = java.util.stream.IntStream.range(0, grid.faces())
+        long outer = IntStream.range(0, grid.faces())
                 .filter(face -> grid.behind(face) == BlockGrid.OUTSIDE || grid.ahead(face) == BlockGrid.OUTSIDE)
                 .count();
         assertThat(outer).isEqualTo(2 * (2 * 2 + 3 * 2 + 3 * 2));

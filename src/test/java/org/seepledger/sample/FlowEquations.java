@@ -1,6 +1,7 @@
 package org.seepledger.sample;
 
 import java.util.Arrays;
+import java.util.stream.IntStream;
 import org.apache.commons.math3.linear.ArrayRealVector;
 import org.apache.commons.math3.linear.ConjugateGradient;
 import org.apache.commons.math3.linear.JacobiPreconditioner;
@@ -15,6 +16,9 @@ import org.apache.commons.math3.linear.RealVector;
  * is that of the two half-blocks in series; at an outer face that has a head, of the one half-block. Saturated
  * thicknesses are given, so the equations are linear; they are symmetric and positive definite wherever some head is
  * given, and are solved by conjugate gradients (Hestenes and Stiefel 1952) with the diagonal as preconditioner.
+ *
+ * <p>A block without thickness hands on what flows across it, and nothing flows along it: where a layer pinches out the
+ * blocks above and below are neighbours.
  */
 final class FlowEquations {
 
@@ -24,6 +28,7 @@ final class FlowEquations {
     private final FlowProblem problem;
     private final BlockGrid grid;
     private final double[] conductance;
+    private final int[] joining;
 
     /**
      * Sets up the equations.
@@ -32,9 +37,22 @@ final class FlowEquations {
      * @param saturated the water-filled thickness of each cell, m
      */
     FlowEquations(FlowProblem problem, double[] saturated) {
+        this(problem, FaceThickness.own(saturated));
+    }
+
+    /**
+     * Sets up the equations.
+     *
+     * @param problem the ground and the water
+     * @param thickness the thickness of the water that flows through lateral faces
+     */
+    FlowEquations(FlowProblem problem, FaceThickness thickness) {
         this.problem = problem;
         this.grid = problem.grid();
-        this.conductance = conductances(saturated);
+        this.conductance = conductances(thickness);
+        this.joining = IntStream.range(0, grid.faces())
+                .filter(face -> isInner(face) && conductance[face] > 0)
+                .toArray();
     }
 
     /**
@@ -43,8 +61,18 @@ final class FlowEquations {
      * @param start heads to begin from; inactive cells keep theirs
      */
     double[] solve(double[] start) {
+        return solve(start, RESIDUAL_REDUCTION);
+    }
+
+    /**
+     * {@return heads, m, that come nearer to satisfying the equations}
+     *
+     * @param start heads to begin from; inactive cells keep theirs
+     * @param reduction what is to be left of the imbalance, as a share of that at the start
+     */
+    double[] solve(double[] start, double reduction) {
         double[] diagonal = diagonal();
-        RealVector correction = new ConjugateGradient(MAX_ITERATIONS, RESIDUAL_REDUCTION, false)
+        RealVector correction = new ConjugateGradient(MAX_ITERATIONS, reduction, false)
                 .solve(
                         operator(diagonal),
                         new JacobiPreconditioner(diagonal, true),
@@ -103,17 +131,16 @@ final class FlowEquations {
     }
 
     /** Adds up the resistances of the half-blocks on both sides of each face; no conductance where nothing can flow. */
-    private double[] conductances(double[] saturated) {
+    private double[] conductances(FaceThickness thickness) {
         double[] resistance = new double[grid.faces()];
         for (int cell = 0; cell < grid.cells(); cell++) {
-            double transmissivity = problem.horizontal()[cell] * saturated[cell];
-            double alongX = grid.width(cell) / (2 * transmissivity * grid.height(cell));
-            double alongY = grid.height(cell) / (2 * transmissivity * grid.width(cell));
+            double alongX = grid.width(cell) / (2 * problem.horizontal()[cell] * grid.height(cell));
+            double alongY = grid.height(cell) / (2 * problem.horizontal()[cell] * grid.width(cell));
             double alongZ = grid.thickness(cell) / (2 * problem.vertical()[cell] * grid.area(cell));
-            resistance[grid.west(cell)] += alongX;
-            resistance[grid.east(cell)] += alongX;
-            resistance[grid.south(cell)] += alongY;
-            resistance[grid.north(cell)] += alongY;
+            resistance[grid.west(cell)] += alongX / thickness.of(cell, grid.west(cell));
+            resistance[grid.east(cell)] += alongX / thickness.of(cell, grid.east(cell));
+            resistance[grid.south(cell)] += alongY / thickness.of(cell, grid.south(cell));
+            resistance[grid.north(cell)] += alongY / thickness.of(cell, grid.north(cell));
             resistance[grid.bottom(cell)] += alongZ;
             resistance[grid.top(cell)] += alongZ;
         }
@@ -171,12 +198,14 @@ final class FlowEquations {
     /** What each cell loses when its head and its neighbours' rise by the given ones. */
     private double[] lossesPerHead(double[] diagonal, double[] heads) {
         double[] losses = new double[heads.length];
-        Arrays.setAll(losses, cell -> diagonal[cell] * heads[cell]);
-        for (int face = 0; face < conductance.length; face++) {
-            if (isInner(face)) {
-                losses[grid.behind(face)] -= conductance[face] * heads[grid.ahead(face)];
-                losses[grid.ahead(face)] -= conductance[face] * heads[grid.behind(face)];
-            }
+        for (int cell = 0; cell < losses.length; cell++) {
+            losses[cell] = diagonal[cell] * heads[cell];
+        }
+        for (int face : joining) {
+            int behind = grid.behind(face);
+            int ahead = grid.ahead(face);
+            losses[behind] -= conductance[face] * heads[ahead];
+            losses[ahead] -= conductance[face] * heads[behind];
         }
         return losses;
     }

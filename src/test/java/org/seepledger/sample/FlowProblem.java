@@ -24,6 +24,10 @@ record FlowProblem(
         return !Double.isNaN(horizontal[cell]);
     }
 
+    FlowProblem with(List<Exchange> others) {
+        return new FlowProblem(grid, horizontal, vertical, outerHead, others, supply);
+    }
+
     /** The water-filled thickness of each cell at some heads; layers without a water table are full. */
     double[] saturatedThickness(double[] heads, boolean[] waterTable) {
         double[] thickness = new double[grid.cells()];

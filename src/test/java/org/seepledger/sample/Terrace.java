@@ -44,16 +44,18 @@ final class Terrace {
         BlockGrid grid = TerraceGround.grid();
         int[] recharge = recharge(grid);
         List<River.Piece> river = RIVER.pieces(grid);
-        double[] horizontal = perCell(grid, TerraceGround::horizontal);
+        CellField ground = TerraceGround::horizontal;
+        CellField across = TerraceGround::vertical;
+        CellField regional = (layer, x, y) -> regionalHead(x, y);
+        double[] horizontal = ground.on(grid);
         FlowProblem problem = new FlowProblem(
                 grid,
                 horizontal,
-                perCell(grid, TerraceGround::vertical),
+                across.on(grid),
                 outerHeads(grid),
                 river.stream().map(River.Piece::exchange).toList(),
                 supply(grid, horizontal, recharge));
-        double[] start = perCell(grid, (layer, x, y) -> regionalHead(x, y));
-        return new Terrace(problem, WaterTableFlow.solve(problem, WATER_TABLE, start), river, recharge);
+        return new Terrace(problem, WaterTableFlow.solve(problem, WATER_TABLE, regional.on(grid)), river, recharge);
     }
 
     FlowProblem problem() {
@@ -145,16 +147,5 @@ final class Terrace {
             }
         }
         return BlockGrid.OUTSIDE;
-    }
-
-    /** A quantity of the ground or the water, by layer and place. */
-    private interface Field {
-        double at(int layer, double x, double y);
-    }
-
-    private static double[] perCell(BlockGrid grid, Field field) {
-        double[] values = new double[grid.cells()];
-        Arrays.setAll(values, cell -> field.at(grid.layer(cell), grid.centreX(cell), grid.centreY(cell)));
-        return values;
     }
 }

@@ -54,9 +54,9 @@ final class TerraceGround {
         if (isKnoll(layer, x, y)) {
             return Double.NaN;
         }
-        double clayLens = layer == GRAVEL && isInside(x, y, 1265, 505, 175, 48) ? -4.2 : 0;
-        double sandyWindow = layer == SILT ? 4 * bump(x, y, 1480, 680, 130, 90) : 0;
-        return CONDUCTIVITY[layer] * exp(SPREAD[layer] * waves(layer, x, y) + clayLens + sandyWindow);
+        double clayLens = layer == GRAVEL && Forms.isInside(x, y, 1265, 505, 175, 48) ? -4.2 : 0;
+        double sandyWindow = layer == SILT ? 4 * Forms.bump(x, y, 1480, 680, 130, 90) : 0;
+        return CONDUCTIVITY[layer] * exp(SPREAD[layer] * Forms.waves(x, y, 1.7 * layer) + clayLens + sandyWindow);
     }
 
     /** Hydraulic conductivity across the layer, m/d. */
@@ -76,26 +76,7 @@ final class TerraceGround {
 
     /** The knoll widens downward. */
     private static boolean isKnoll(int layer, double x, double y) {
-        return isInside(x, y, 1900, 1150, 130 + 45 * layer, 95 + 35 * layer);
-    }
-
-    private static boolean isInside(double x, double y, double centreX, double centreY, double alongX, double alongY) {
-        double dx = (x - centreX) / alongX;
-        double dy = (y - centreY) / alongY;
-        return dx * dx + dy * dy < 1;
-    }
-
-    private static double waves(int layer, double x, double y) {
-        double shift = 1.7 * layer;
-        return 0.6 * sin((x + 0.4 * y) / 145 + shift)
-                + 0.5 * cos((y - 0.3 * x) / 102 + 1 + shift)
-                + 0.4 * sin(x / 53 + shift) * sin(y / 46);
-    }
-
-    private static double bump(double x, double y, double centreX, double centreY, double alongX, double alongY) {
-        double dx = (x - centreX) / alongX;
-        double dy = (y - centreY) / alongY;
-        return exp(-dx * dx - dy * dy);
+        return Forms.isInside(x, y, 1900, 1150, 130 + 45 * layer, 95 + 35 * layer);
     }
 
     /** Edges from runs of equal cells, each a size and a count. */

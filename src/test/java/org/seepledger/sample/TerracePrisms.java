@@ -1,7 +1,6 @@
 package org.seepledger.sample;
 
-import java.util.stream.Collectors;
-import java.util.stream.Stream;
+import java.util.List;
 
 /** The prisms of the terrace, drawn across its cells, as GeoJSON in the map's local coordinates. */
 final class TerracePrisms {
@@ -33,48 +32,23 @@ final class TerracePrisms {
     private TerracePrisms() {}
 
     static String geoJson() {
-        return """
-                {"type": "FeatureCollection", "features": [
-                %s,
-                %s,
-                %s
-                ]}
-                """.formatted(
-                        feature(
-                                "well field",
-                                "[1, 2]",
-                                "{\"river side\": [\"side 1-3\"], \"pond edge\": [\"island 1\"]}",
-                                WELL_FIELD,
-                                POND),
-                        feature(
-                                "upper terrace",
-                                "[1, 2]",
-                                "{\"well field side\": [\"side 1-2\"], \"hill side\": [\"side 6-7\"]}",
-                                UPPER_TERRACE),
-                        feature("deep sand", "[3, 3]", "{\"river side\": [\"side 1\"]}", DEEP_SAND));
-    }
-
-    private static String feature(String name, String layers, String boundaries, double[][]... rings) {
-        return """
-                {"type": "Feature",
-                 "properties": {"name": "%s", "layers": %s, "boundaries": %s},
-                 "geometry": {"type": "Polygon", "coordinates": [%s]}}""".formatted(
-                        name,
-                        layers,
-                        boundaries,
-                        Stream.of(rings).map(TerracePrisms::ring).collect(Collectors.joining(", ")));
-    }
-
-    private static String ring(double[][] vertices) {
-        StringBuilder ring = new StringBuilder("[");
-        for (double[] vertex : vertices) {
-            ring.append(position(vertex)).append(", ");
-        }
-        return ring.append(position(vertices[0])).append(']').toString();
-    }
-
-    private static String position(double[] vertex) {
-        return "[" + Digits.decimals(Terrace.FRAME.mapX(vertex[0], vertex[1]), 1) + ", "
-                + Digits.decimals(Terrace.FRAME.mapY(vertex[0], vertex[1]), 1) + "]";
+        return DrawnPrism.geoJson(
+                "",
+                Terrace.FRAME,
+                new DrawnPrism(
+                        "well field",
+                        "\"layers\": [1, 2]",
+                        "{\"river side\": [\"side 1-3\"], \"pond edge\": [\"island 1\"]}",
+                        List.of(WELL_FIELD, POND)),
+                new DrawnPrism(
+                        "upper terrace",
+                        "\"layers\": [1, 2]",
+                        "{\"well field side\": [\"side 1-2\"], \"hill side\": [\"side 6-7\"]}",
+                        List.<double[][]>of(UPPER_TERRACE)),
+                new DrawnPrism(
+                        "deep sand",
+                        "\"layers\": [3, 3]",
+                        "{\"river side\": [\"side 1\"]}",
+                        List.<double[][]>of(DEEP_SAND)));
     }
 }

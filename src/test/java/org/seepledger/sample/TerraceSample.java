@@ -1,8 +1,6 @@
 package org.seepledger.sample;
 
 import java.io.IOException;
-import java.nio.file.Files;
-import java.nio.file.Path;
 import java.util.Map;
 import java.util.TreeMap;
 import java.util.stream.Collectors;
@@ -20,13 +18,7 @@ public final class TerraceSample {
      * @throws IOException if it cannot be written
      */
     public static void main(String[] args) throws IOException {
-        if (args.length != 1) {
-            throw new IllegalArgumentException("name the folder to write the sample into");
-        }
-        Path folder = Files.createDirectories(Path.of(args[0]));
-        for (Map.Entry<String, String> file : files(Terrace.solved()).entrySet()) {
-            Files.writeString(folder.resolve(file.getKey()), file.getValue());
-        }
+        SampleFolder.named(args).write(files(Terrace.solved()));
     }
 
     /** {@return what each file holds, by name} */

@@ -35,6 +35,9 @@ public final class AquiferReader {
     /** The file that describes the set. */
     public static final String FILE = "aquifer.json";
 
+    /** Some five thousand years. */
+    private static final int MOST_DAYS = 2_000_000;
+
     private final JsonNode root;
     private final String folderName;
     private final DataFiles files;
@@ -88,7 +91,7 @@ public final class AquiferReader {
         Frame frame = new Frame(grid, layerNodes.size(), times());
         Bindings bindings = new Bindings(files, frame);
         List<Layer> layers = layers(layerNodes, bindings);
-        Flow flow = new FlowReader(root.get("flow"), bindings, length, time, warnings).read();
+        Flow flow = new FlowReader(root.get("flow"), root.has("head"), bindings, length, time, warnings).read();
         Optional<GriddedValues> head = root.has("head")
                 ? Optional.of(bindings.values("head", root.get("head"), "head", length, StepKind.INSTANT))
                 : Optional.empty();
@@ -98,6 +101,7 @@ public final class AquiferReader {
         Aquifer aquifer = new Aquifer(name, grid, layers, frame.times(), flow, head, storage, sources, length, time);
         warnOfChoices(aquifer);
         files.shapeNote().ifPresent(notes::add);
+        crs.code().ifPresent(this::warnOfOtherSystems);
         Map<String, Path> inputs = new LinkedHashMap<>();
         inputs.put(FILE, file);
         inputs.putAll(files.inputs());
@@ -107,23 +111,46 @@ public final class AquiferReader {
     }
 
     private Measure measure(String key, String like) {
+        String text = root.get(key).textValue();
+        String expected = "a unit as \"" + like + "\"";
         try {
-            Measure measure = Measure.of(root.get(key).textValue());
+            Measure measure = Measure.of(text);
             if (measure.isCompatible(Measure.of(like))) {
                 return measure;
             }
-            throw new IllegalArgumentException("\"" + measure + "\" is the unit of something else");
         } catch (IllegalArgumentException e) {
-            throw new DataFault(FILE, key, e.getMessage(), "a unit as \"" + like + "\"", "Correct the unit.");
+            String remedy = "Known are " + Measure.choices() + ".";
+            throw new DataFault(FILE, key, "the unknown unit \"" + text + "\"", expected, remedy);
         }
+        throw new DataFault(FILE, key, "\"" + text + "\", the unit of something else", expected, "Correct the unit.");
     }
 
     private Times times() {
         try {
-            return new Times(GridReader.numbers(root.get("times")), time, startDate());
+            Times times = new Times(GridReader.numbers(root.get("times")), time, startDate());
+            checkCalendar(times);
+            return times;
         } catch (IllegalArgumentException e) {
             throw new DataFault(
-                    FILE, "times", e.getMessage(), "increasing instants", "Sort them and leave repeats out.");
+                    FILE,
+                    "times",
+                    "times that cannot be (" + e.getMessage() + ")",
+                    "increasing instants",
+                    "Sort them and leave repeats out.");
+        }
+    }
+
+    /** Beyond four-digit years a date is a mistake, and calendar periods would be too many to count. */
+    private static void checkCalendar(Times times) {
+        double days = (times.instant(times.intervals()) - times.instant(0))
+                * times.unit().in(Measure.of("d"));
+        if (times.hasDates() && !(days < MOST_DAYS)) {
+            throw new DataFault(
+                    FILE,
+                    "times",
+                    "times that last " + days + " days, with a start_date",
+                    "fewer than " + MOST_DAYS + " days",
+                    "Correct the times or the time_unit, or leave the start_date out.");
         }
     }
 
@@ -216,6 +243,16 @@ public final class AquiferReader {
                         + " overstates flow where the water table is lower.");
             }
         }
+    }
+
+    private void warnOfOtherSystems(String own) {
+        files.systems().forEach((crs, rasters) -> {
+            if (crs.startsWith("EPSG:") && !crs.equals(own)) {
+                String more = rasters.count() == 1 ? "" : " (so do " + (rasters.count() - 1) + " more)";
+                warnings.add("\"" + rasters.first() + "\" says that it is in " + crs + more + ", but the set's crs is "
+                        + own + "; it is taken to be in the set's.");
+            }
+        });
     }
 
     private List<Provenance> origins() {

@@ -76,7 +76,7 @@ final class Bindings {
 
         GriddedValues read(JsonNode node) {
             if (node.isNumber()) {
-                return GriddedValues.constant(node.doubleValue());
+                return new BoundNumber(finite(node.doubleValue()), place, place, Conversion.NONE);
             }
             if (node.isArray()) {
                 return perLayer(node);
@@ -88,10 +88,20 @@ final class Bindings {
                 throw fault("neither or both of \"value\" and \"file\"", "one of them", "Give the one that is meant.");
             }
             if (node.has("value")) {
+                if (node.has("band") || node.has("column")) {
+                    throw fault("\"value\" with a band or a column", "one of them", "Give the one that is meant.");
+                }
                 double value = node.get("value").doubleValue();
-                return GriddedValues.constant(conversion(node, unit(node)).of(value));
+                return new BoundNumber(value, place + ".value", place, conversion(node, unit(node)));
             }
             return file(node.get("file").textValue(), node);
+        }
+
+        private double finite(double value) {
+            if (!Double.isFinite(value)) {
+                throw fault("a number too large", "one within the range of double precision", "Correct it.");
+            }
+            return value;
         }
 
         private GriddedValues perLayer(JsonNode node) {
@@ -144,13 +154,15 @@ final class Bindings {
                             "Name a band that exists, or give the raster all its bands.");
                 }
             }
-            return new RasterValues(files, name, band, conversion(node, unit(node)));
+            return new RasterValues(files, name, band, place, conversion(node, unit(node)));
         }
 
         private Set<String> expanded(String name) {
             Set<String> names = new LinkedHashSet<>();
-            for (int step = 0; step < steps(steps); step++) {
-                for (int layer = 0; layer < frame.layers(); layer++) {
+            int last = FileName.changes(name) ? steps(steps) : 1;
+            int lowest = FileName.layered(name) ? frame.layers() : 1;
+            for (int step = 0; step < last; step++) {
+                for (int layer = 0; layer < lowest; layer++) {
                     names.add(FileName.of(name, layer, step));
                 }
             }
@@ -170,7 +182,10 @@ final class Bindings {
             }
             StepKind wanted = band.textValue().equals("interval") ? StepKind.INTERVAL : StepKind.INSTANT;
             if (wanted != steps) {
-                throw fault("the band \"" + band.textValue() + "\"", placeholders(), "Use the right word.");
+                throw fault(
+                        "the band \"" + band.textValue() + "\"",
+                        placeholders().replaceAll("\\{(\\w+)}", "\"$1\"").replace("placeholder", "band"),
+                        "Use the right word.");
             }
             return new BandRule(BandRule.Kind.STEP, 0);
         }
@@ -185,7 +200,11 @@ final class Bindings {
             GriddedTable table = files.table(name, place, frame, repeats);
             String column = table.column(Optional.ofNullable(node.get("column")).map(JsonNode::textValue));
             Optional<Measure> unit = table.unit(column, unit(node));
-            return new ConvertedValues(table.values(column, steps), conversion(node, unit));
+            return new ConvertedValues(
+                    table.values(column, steps),
+                    new ConvertedValues.Column(name, column, steps, table.isWholeGrid()),
+                    place,
+                    conversion(node, unit));
         }
 
         private Optional<Measure> unit(JsonNode node) {
@@ -193,7 +212,10 @@ final class Bindings {
                 try {
                     return Measure.of(text.textValue());
                 } catch (IllegalArgumentException e) {
-                    throw fault(e.getMessage(), "a unit as \"" + target + "\"", "Correct the unit.");
+                    throw fault(
+                            "the unknown unit \"" + text.textValue() + "\"",
+                            "a unit as \"" + target + "\"",
+                            "Known are " + Measure.choices() + ".");
                 }
             });
         }

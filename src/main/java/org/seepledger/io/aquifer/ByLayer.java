@@ -2,6 +2,7 @@ package org.seepledger.io.aquifer;
 
 import java.util.List;
 import org.seepledger.aquifer.GriddedValues;
+import org.seepledger.aquifer.Stored;
 import org.seepledger.aquifer.Window;
 
 /**
@@ -14,6 +15,11 @@ record ByLayer(List<GriddedValues> layers) implements GriddedValues {
     @Override
     public void read(int layer, int step, Window window, double[] target, int offset) {
         layers.get(layer).read(layer, step, window, target, offset);
+    }
+
+    @Override
+    public List<Stored> stored(int layer, int step, Window window) {
+        return layers.get(layer).stored(layer, step, window);
     }
 
     @Override

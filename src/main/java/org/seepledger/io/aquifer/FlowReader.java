@@ -8,6 +8,7 @@ import org.seepledger.aquifer.DarcyFlux;
 import org.seepledger.aquifer.Flow;
 import org.seepledger.aquifer.GivenFaceFlow;
 import org.seepledger.aquifer.GriddedValues;
+import org.seepledger.aquifer.HeadGradient;
 import org.seepledger.aquifer.OuterFaces;
 import org.seepledger.fault.DataFault;
 import org.seepledger.io.table.StepKind;
@@ -16,8 +17,12 @@ import org.seepledger.unit.Measure;
 /** Reads the {@code flow} of a set. */
 final class FlowReader {
 
+    private static final String DARCY_FLUX = "darcy_flux";
+    private static final String FACE_FLOW = "face_flow";
     private static final List<String> SHARED = List.of("kind", "at", "origin", "reference", "uncertainty");
     private static final List<String> DARCY = List.of("x", "y", "z", "components", "outer_faces");
+    private static final List<String> HEADS =
+            List.of("conductivity", "conductivity_y", "vertical_conductivity", "heads");
     private static final List<String> FACES = List.of("east", "north", "up", "west", "south", "down");
 
     private final JsonNode node;
@@ -26,8 +31,11 @@ final class FlowReader {
     private final Measure rate;
     private final List<String> warnings;
     private final boolean snapshots;
+    private final boolean hasHeads;
 
-    FlowReader(JsonNode node, Bindings bindings, Measure length, Measure time, List<String> warnings) {
+    FlowReader(
+            JsonNode node, boolean hasHeads, Bindings bindings, Measure length, Measure time, List<String> warnings) {
+        this.hasHeads = hasHeads;
         this.node = node;
         this.bindings = bindings;
         this.velocity = length.per(time);
@@ -42,17 +50,10 @@ final class FlowReader {
                     "Flow is given as snapshots at instants; each interval takes the mean of its two ends, which is not"
                             + " the interval's own mean.");
         }
-        String kind = node.get("kind").textValue();
-        return switch (kind) {
-            case "darcy_flux" -> darcyFlux();
-            case "face_flow" -> faceFlow();
-            default ->
-                throw new DataFault(
-                        AquiferReader.FILE,
-                        "flow.kind",
-                        "\"" + kind + "\", which this version does not compute yet",
-                        "\"darcy_flux\" or \"face_flow\"",
-                        "Give the specific discharge or the face flows that the heads lead to.");
+        return switch (node.get("kind").textValue()) {
+            case DARCY_FLUX -> darcyFlux();
+            case FACE_FLOW -> faceFlow();
+            default -> headGradient();
         };
     }
 
@@ -78,6 +79,27 @@ final class FlowReader {
                 optional("down", rate));
     }
 
+    private Flow headGradient() {
+        onlyKeys(HEADS);
+        if (!hasHeads) {
+            throw new DataFault(
+                    AquiferReader.FILE, "flow.kind", "\"head_gradient\" without heads", "\"head\"", "Add the heads.");
+        }
+        if (!node.has("vertical_conductivity") && bindings.frame().layers() > 1) {
+            throw new DataFault(
+                    AquiferReader.FILE,
+                    "flow",
+                    "no \"vertical_conductivity\" with " + bindings.frame().layers() + " layers",
+                    "one, since water flows between layers",
+                    "Add it.");
+        }
+        return new HeadGradient(
+                values("conductivity", velocity),
+                optional("conductivity_y", velocity),
+                optional("vertical_conductivity", velocity),
+                node.path("heads").asText().equals("mean"));
+    }
+
     private void onlyKeys(List<String> own) {
         List<String> known = new ArrayList<>(SHARED);
         known.addAll(own);
@@ -88,10 +110,14 @@ final class FlowReader {
                         "flow",
                         "\"" + key + "\" with a flow of kind \""
                                 + node.get("kind").textValue() + "\"",
-                        "only " + known,
-                        "Take it out, or correct the kind.");
+                        "one of " + String.join(", ", known),
+                        "It belongs to the kind \"" + kindOf(key) + "\": take it out, or correct the kind.");
             }
         });
+    }
+
+    private static String kindOf(String key) {
+        return DARCY.contains(key) ? DARCY_FLUX : FACES.contains(key) ? FACE_FLOW : "head_gradient";
     }
 
     private Optional<GriddedValues> vertical(String key, Measure unit) {

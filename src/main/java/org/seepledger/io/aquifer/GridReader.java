@@ -1,13 +1,10 @@
 package org.seepledger.io.aquifer;
 
 import com.fasterxml.jackson.databind.JsonNode;
-import java.io.IOException;
-import java.io.UncheckedIOException;
 import java.util.Iterator;
 import org.seepledger.aquifer.Axis;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.fault.DataFault;
-import org.seepledger.io.raster.GeoTiff;
 
 /** Reads the {@code grid} of a set. */
 final class GridReader {
@@ -16,13 +13,7 @@ final class GridReader {
 
     static Grid read(JsonNode node, double planUnit, DataFiles files) {
         if (node.has("like")) {
-            String name = node.get("like").textValue();
-            files.path(name, "grid.like");
-            try (GeoTiff raster = files.raster(name)) {
-                return raster.grid(planUnit);
-            } catch (IOException e) {
-                throw new UncheckedIOException(e);
-            }
+            return files.grid(node.get("like").textValue(), "grid.like", planUnit);
         }
         double rotation = node.has("rotation") ? node.get("rotation").doubleValue() : 0;
         return new Grid(axis(node.get("x"), "grid.x"), axis(node.get("y"), "grid.y"), rotation, planUnit);

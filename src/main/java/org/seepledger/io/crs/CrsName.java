@@ -4,6 +4,7 @@ import java.util.Optional;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import org.geotools.api.referencing.FactoryException;
+import org.geotools.api.referencing.NoSuchAuthorityCodeException;
 import org.geotools.api.referencing.crs.CoordinateReferenceSystem;
 import org.geotools.referencing.CRS;
 import org.geotools.referencing.crs.DefaultGeographicCRS;
@@ -50,6 +51,8 @@ final class CrsName {
             if (name.length() <= LONGEST && TEXT.matcher(name).matches()) {
                 return parse(name);
             }
+        } catch (NoSuchAuthorityCodeException e) {
+            throw unknown(name, shownFile, place, "");
         } catch (FactoryException | RuntimeException e) {
             throw unknown(name, shownFile, place, " (" + e.getMessage() + ")");
         }

@@ -14,8 +14,8 @@ import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.Window;
 
 /**
- * Writes one quantity on a part of a grid as a GeoTIFF of one band: 64-bit reals, nodata {@code nan}, tiles packed with
- * DEFLATE.
+ * Writes quantities on a part of a grid as a GeoTIFF: 64-bit reals, nodata {@code nan}, tiles packed with DEFLATE, band
+ * after band.
  *
  * <p>It has a georeference where the grid is evenly spaced, turned grids included. An unevenly spaced one has none, as
  * GeoTIFF has no way to say it: such a raster is matched by its shape.
@@ -32,17 +32,20 @@ public final class GeoTiffWriter {
     private final Window window;
     private final int tileRows;
     private final int tileColumns;
+    private final int bands;
+    private final int tilesOfBand;
     private final long[] offsets;
     private final long[] counts;
 
-    private GeoTiffWriter(RandomAccessFile file, Window window) {
+    private GeoTiffWriter(RandomAccessFile file, Window window, int bands) {
         this.file = file;
         this.window = window;
         this.tileRows = tile(window.rows());
         this.tileColumns = tile(window.columns());
-        int tiles = tiles(window.rows(), tileRows) * tiles(window.columns(), tileColumns);
-        this.offsets = new long[tiles];
-        this.counts = new long[tiles];
+        this.bands = bands;
+        this.tilesOfBand = tiles(window.rows(), tileRows) * tiles(window.columns(), tileColumns);
+        this.offsets = new long[Math.multiplyExact(bands, tilesOfBand)];
+        this.counts = new long[offsets.length];
     }
 
     /**
@@ -64,13 +67,40 @@ public final class GeoTiffWriter {
     static void write(
             Path path, Grid grid, Window window, Optional<String> crs, IntFunction<double[]> rows, boolean big)
             throws IOException {
+        write(path, grid, window, crs, new Bands(1, Optional.empty(), (band, row) -> rows.apply(row)), big);
+    }
+
+    /**
+     * The bands of a raster.
+     *
+     * @param count how many there are
+     * @param metadata the XML of their scales and offsets; empty where none has any
+     * @param rows gives the window's values of a band and a row of the grid; asked band by band, from the north
+     */
+    record Bands(int count, Optional<String> metadata, Rows rows) {
+
+        interface Rows {
+            double[] row(int band, int row);
+        }
+    }
+
+    static void write(Path path, Grid grid, Window window, Optional<String> crs, Bands bands) throws IOException {
+        write(path, grid, window, crs, bands, (long) bands.count * window.size() * Double.BYTES > CLASSIC_BYTES);
+    }
+
+    private static void write(Path path, Grid grid, Window window, Optional<String> crs, Bands bands, boolean big)
+            throws IOException {
         try (RandomAccessFile file = new RandomAccessFile(path.toFile(), "rw")) {
             file.setLength(0);
-            GeoTiffWriter writer = new GeoTiffWriter(file, window);
+            GeoTiffWriter writer = new GeoTiffWriter(file, window, bands.count);
             file.write(new byte[big ? 16 : 8]);
-            writer.tiles(rows);
+            for (int band = 0; band < bands.count; band++) {
+                int index = band;
+                writer.tiles(band, row -> bands.rows.row(index, row));
+            }
             long directory = writer.wordBoundary();
             TiffFields fields = writer.structure(big);
+            bands.metadata.ifPresent(xml -> fields.text(Tag.GDAL_METADATA, xml));
             georeference(fields, grid, window, crs);
             file.write(fields.at(directory));
             file.seek(0);
@@ -100,7 +130,7 @@ public final class GeoTiffWriter {
         return header.array();
     }
 
-    private void tiles(IntFunction<double[]> rows) throws IOException {
+    private void tiles(int number, IntFunction<double[]> rows) throws IOException {
         int across = tiles(window.columns(), tileColumns);
         ByteBuffer[] band = new ByteBuffer[across];
         Arrays.setAll(
@@ -112,7 +142,7 @@ public final class GeoTiffWriter {
                 deal(values, band);
             }
             for (int i = 0; i < across; i++) {
-                append(top / tileRows * across + i, band[i]);
+                append(number * tilesOfBand + top / tileRows * across + i, band[i]);
             }
         }
     }
@@ -144,20 +174,27 @@ public final class GeoTiffWriter {
     }
 
     private TiffFields structure(boolean big) {
-        return new TiffFields(big)
+        TiffFields fields = new TiffFields(big)
                 .integer(Tag.IMAGE_WIDTH, window.columns())
                 .integer(Tag.IMAGE_LENGTH, window.rows())
-                .shorts(Tag.BITS_PER_SAMPLE, SampleType.FLOAT64.bits())
+                .shorts(Tag.BITS_PER_SAMPLE, ofEachBand(SampleType.FLOAT64.bits()))
                 .shorts(Tag.COMPRESSION, Compression.DEFLATE.code())
                 .shorts(Tag.PHOTOMETRIC_INTERPRETATION, 1)
-                .shorts(Tag.SAMPLES_PER_PIXEL, 1)
-                .shorts(Tag.PLANAR_CONFIGURATION, 1)
-                .shorts(Tag.SAMPLE_FORMAT, 3)
+                .shorts(Tag.SAMPLES_PER_PIXEL, bands)
+                .shorts(Tag.PLANAR_CONFIGURATION, bands == 1 ? 1 : 2)
+                .shorts(Tag.SAMPLE_FORMAT, ofEachBand(3))
                 .shorts(Tag.TILE_WIDTH, tileColumns)
                 .shorts(Tag.TILE_LENGTH, tileRows)
                 .places(Tag.TILE_OFFSETS, offsets)
                 .places(Tag.TILE_BYTE_COUNTS, counts)
                 .text(Tag.GDAL_NODATA, "nan");
+        return bands == 1 ? fields : fields.shorts(Tag.EXTRA_SAMPLES, new int[bands - 1]);
+    }
+
+    private int[] ofEachBand(int value) {
+        int[] values = new int[bands];
+        Arrays.fill(values, value);
+        return values;
     }
 
     private static void georeference(TiffFields fields, Grid grid, Window window, Optional<String> crs) {

@@ -1,5 +1,7 @@
 package org.seepledger.io.raster;
 
+import java.util.Locale;
+
 /**
  * Which stored values mean that there is none.
  *
@@ -41,7 +43,7 @@ final class NoData {
     }
 
     private static double parsed(TiffFile file, String text) {
-        String plain = text.toLowerCase(java.util.Locale.ROOT);
+        String plain = text.toLowerCase(Locale.ROOT);
         if (plain.contains("nan") || plain.contains("#ind") || plain.contains("#qnan")) {
             return Double.NaN;
         }

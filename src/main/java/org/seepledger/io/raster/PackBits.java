@@ -1,5 +1,7 @@
 package org.seepledger.io.raster;
 
+import java.util.Arrays;
+
 /** Run lengths of bytes (TIFF 6.0, section 9). */
 final class PackBits {
 
@@ -18,7 +20,7 @@ final class PackBits {
                 out += run;
             } else if (head != Byte.MIN_VALUE) {
                 int run = Math.min(1 - head, target.length - out);
-                java.util.Arrays.fill(target, out, out + run, packed[in++]);
+                Arrays.fill(target, out, out + run, packed[in++]);
                 out += run;
             }
         }

@@ -2,6 +2,7 @@ package org.seepledger.io.raster;
 
 import java.io.Closeable;
 import java.io.IOException;
+import java.io.UncheckedIOException;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.Iterator;
@@ -69,7 +70,7 @@ public final class RasterFiles implements Closeable {
             try {
                 raster.close();
             } catch (IOException e) {
-                throw new java.io.UncheckedIOException(e);
+                throw new UncheckedIOException(e);
             }
         }
     }

@@ -2,6 +2,7 @@ package org.seepledger.io.raster;
 
 import java.nio.ByteBuffer;
 import java.util.Arrays;
+import java.util.Locale;
 import java.util.Optional;
 
 /** What one stored value is. All but 64-bit integers, which a double cannot hold exactly. */
@@ -65,6 +66,6 @@ enum SampleType {
 
     @Override
     public String toString() {
-        return name().toLowerCase(java.util.Locale.ROOT);
+        return name().toLowerCase(Locale.ROOT);
     }
 }

@@ -3,6 +3,7 @@ package org.seepledger.io.raster;
 import java.nio.ByteBuffer;
 import java.nio.ByteOrder;
 import java.nio.charset.StandardCharsets;
+import java.util.Arrays;
 import java.util.Map;
 import java.util.TreeMap;
 
@@ -89,7 +90,7 @@ final class TiffFields {
             bytes.putShort((short) (int) entry.getKey()).putShort((short) field.type);
             place(bytes, field.count);
             if (bytesOutside(field) == 0) {
-                bytes.put(java.util.Arrays.copyOf(field.values, placeBytes()));
+                bytes.put(Arrays.copyOf(field.values, placeBytes()));
             } else {
                 place(bytes, position + outside);
                 bytes.put(outside, field.values);

@@ -1,14 +1,8 @@
 package org.seepledger.io.result;
 
 import java.io.IOException;
-import java.io.Writer;
-import java.nio.file.Files;
 import java.nio.file.Path;
-import java.time.LocalDateTime;
-import java.time.format.DateTimeFormatter;
 import java.util.List;
-import org.apache.commons.csv.CSVFormat;
-import org.apache.commons.csv.CSVPrinter;
 import org.seepledger.aquifer.Times;
 import org.seepledger.io.table.CsvText;
 import org.seepledger.ledger.Entry;
@@ -44,9 +38,9 @@ public final class BudgetCsv {
 
     private final Times times;
     private final ResultUnits units;
-    private final CSVPrinter rows;
+    private final ResultTable rows;
 
-    private BudgetCsv(Times times, ResultUnits units, CSVPrinter rows) {
+    private BudgetCsv(Times times, ResultUnits units, ResultTable rows) {
         this.times = times;
         this.units = units;
         this.rows = rows;
@@ -64,14 +58,8 @@ public final class BudgetCsv {
      */
     public static void write(Path file, Statement statement, List<PrismBudget> budgets, Times times, ResultUnits units)
             throws IOException {
-
-        try (Writer text = Files.newBufferedWriter(file)) {
-            for (String line : statement.lines()) {
-                text.write("# " + line + "\r\n");
-            }
-            CSVPrinter printer = new CSVPrinter(text, CSVFormat.RFC4180);
-            printer.printRecord((Object[]) HEADER);
-            BudgetCsv table = new BudgetCsv(times, units, printer);
+        try (ResultTable rows = ResultTable.open(file, statement, HEADER)) {
+            BudgetCsv table = new BudgetCsv(times, units, rows);
             for (PrismBudget prism : budgets) {
                 for (PeriodBudget budget : prism.periods()) {
                     table.write(prism.prism(), budget);
@@ -86,10 +74,10 @@ public final class BudgetCsv {
             String layer = String.valueOf(entry.account().layer() + 1);
             begin(prism, period, entry.account().group(), entry.account().item(), layer);
             for (double volume : new double[] {entry.inflow(), entry.outflow(), entry.net()}) {
-                rows.print(rate(volume, period));
+                rows.cell(rate(volume, period));
             }
             for (double volume : new double[] {entry.inflow(), entry.outflow(), entry.net()}) {
-                rows.print(volume(volume));
+                rows.cell(volume(volume));
             }
             end(units.rate().toString(), units.volume().toString());
         }
@@ -119,26 +107,23 @@ public final class BudgetCsv {
 
     private void nets(String rate, String volume) throws IOException {
         for (String cell : new String[] {NONE, NONE, rate, NONE, NONE, volume}) {
-            rows.print(cell);
+            rows.cell(cell);
         }
     }
 
     private void begin(String prism, Period period, Group group, String item, String layer) throws IOException {
-        rows.print(CsvText.text(prism));
-        rows.print(CsvText.text(period.name()));
-        rows.print(CsvText.number(period.from()));
-        rows.print(CsvText.number(period.to()));
-        rows.print(date(period.from()));
-        rows.print(date(period.to()));
-        rows.print(group.toString());
-        rows.print(CsvText.text(item));
-        rows.print(layer);
+        rows.cell(CsvText.text(prism));
+        rows.cell(CsvText.text(period.name()));
+        rows.span(period, times);
+        rows.cell(group.toString());
+        rows.cell(CsvText.text(item));
+        rows.cell(layer);
     }
 
     private void end(String rateUnit, String volumeUnit) throws IOException {
-        rows.print(rateUnit);
-        rows.print(volumeUnit);
-        rows.println();
+        rows.cell(rateUnit);
+        rows.cell(volumeUnit);
+        rows.endRow();
     }
 
     private String rate(double volume, Period period) {
@@ -147,14 +132,5 @@ public final class BudgetCsv {
 
     private String volume(double volume) {
         return CsvText.number(volume * units.volumeFactor());
-    }
-
-    private String date(double time) {
-        return times.date(time).map(BudgetCsv::iso).orElse(NONE);
-    }
-
-    private static String iso(LocalDateTime date) {
-        boolean midnight = date.equals(date.toLocalDate().atStartOfDay());
-        return midnight ? date.toLocalDate().toString() : DateTimeFormatter.ISO_LOCAL_DATE_TIME.format(date);
     }
 }

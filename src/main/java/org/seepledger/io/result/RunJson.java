@@ -1,23 +1,27 @@
 package org.seepledger.io.result;
 
+import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
 import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import org.seepledger.fault.DataFault;
+import org.seepledger.io.JsonFile;
 import org.seepledger.ledger.Disclaimer;
 
-/** Writes {@code run.json}: what was run, on what, with what result files, and what the reader must know. */
+/** Writes and reads {@code run.json}: what was run, on what, with what result files, and what the reader must know. */
 public final class RunJson {
 
     /** The file's name. */
     public static final String NAME = "run.json";
 
-    /** The key of the list of result files. */
-    public static final String OUTPUTS = "outputs";
+    private static final String PROGRAM = "seepledger";
+    private static final String OUTPUTS = "outputs";
 
     private static final ObjectMapper MAPPER = new ObjectMapper();
 
@@ -53,7 +57,7 @@ public final class RunJson {
      */
     public static void write(Path file, Run run, List<FileRecord> outputs) throws IOException {
         ObjectNode root = MAPPER.createObjectNode();
-        root.put("program", "seepledger").put("version", run.version()).put("command", run.command());
+        root.put("program", PROGRAM).put("version", run.version()).put("command", run.command());
         root.set("options", MAPPER.valueToTree(run.options()));
         addFiles(root.putArray("inputs"), run.statement().inputs());
         root.set("origins", MAPPER.valueToTree(run.statement().origins()));
@@ -64,6 +68,27 @@ public final class RunJson {
         addFiles(root.putArray(OUTPUTS), outputs);
         root.put("disclaimer", Disclaimer.text());
         Files.writeString(file, MAPPER.writerWithDefaultPrettyPrinter().writeValueAsString(root) + "\n");
+    }
+
+    /**
+     * {@return the names of the result files that a run's record lists, as they stand there, whatever they are}
+     *
+     * @param file the record
+     * @throws DataFault if it cannot be read or is not the record of a run of this program
+     */
+    public static List<String> outputs(Path file) {
+        JsonNode root = JsonFile.read(file, file.toString());
+        if (!root.path("program").asText().equals(PROGRAM)) {
+            throw new DataFault(
+                    file.toString(),
+                    "",
+                    "no \"program\": \"" + PROGRAM + "\"",
+                    "the record of an earlier run",
+                    "It was written by something else.");
+        }
+        List<String> names = new ArrayList<>();
+        root.path(OUTPUTS).forEach(output -> names.add(output.path("name").asText()));
+        return names;
     }
 
     private static void addFiles(ArrayNode array, List<FileRecord> files) {

@@ -30,17 +30,6 @@ public record Statement(String title, List<FileRecord> inputs, List<Provenance> 
     }
 
     /**
-     * {@return the same statement with more warnings}
-     *
-     * @param more the warnings
-     */
-    public Statement with(List<String> more) {
-        List<String> all = new ArrayList<>(warnings);
-        all.addAll(more);
-        return new Statement(title, inputs, origins, all);
-    }
-
-    /**
      * {@return the statement line by line, without line breaks in a line}
      */
     public List<String> lines() {

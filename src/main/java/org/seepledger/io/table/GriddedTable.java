@@ -103,6 +103,11 @@ public final class GriddedTable implements AutoCloseable {
         return layout.layer().isPresent();
     }
 
+    /** {@return whether lines tell no cells apart; then each holds for the whole grid} */
+    public boolean isWholeGrid() {
+        return layout.placement().count() == 1;
+    }
+
     /**
      * {@return the value column that is meant: the one asked for, or, if none is, the only one}
      *

@@ -1,5 +1,6 @@
 package org.seepledger.io.table;
 
+import org.seepledger.aquifer.Stored;
 import org.seepledger.io.table.SpanReader.Span;
 import org.seepledger.unit.Measure;
 
@@ -45,5 +46,19 @@ final class PointAmount {
             throw table.fault("a volume without its from or to", "both, since they give it a rate", REMEDY);
         }
         return table.finite(volume.column().orElseThrow(), total / duration);
+    }
+
+    /**
+     * {@return the number in the current line that its rate follows from, and by what it is multiplied}
+     *
+     * @param span from when to when it lasts
+     */
+    Stored given(Span span) {
+        boolean isRate = !Double.isNaN(rate.read(table));
+        OptionalNumber amount = isRate ? rate : volume;
+        int column = amount.column().orElseThrow();
+        double factor = isRate ? amount.factor() : amount.factor() / (span.to() - span.from());
+        String place = "line " + table.line() + ", column " + table.header().name(column);
+        return Stored.number(table.shownName(), place, table.number(column), factor);
     }
 }

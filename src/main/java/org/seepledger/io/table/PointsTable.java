@@ -112,7 +112,8 @@ public final class PointsTable {
                 span.from(),
                 span.to(),
                 amount.rate(span),
-                table.place());
+                table.place(),
+                amount.given(span));
     }
 
     private void checkInside(double x, double y) {

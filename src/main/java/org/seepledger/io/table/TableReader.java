@@ -6,6 +6,7 @@ import java.nio.file.FileSystemException;
 import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
 import java.util.Iterator;
+import java.util.List;
 import java.util.stream.StreamSupport;
 import org.apache.commons.csv.CSVException;
 import org.apache.commons.csv.CSVParser;
@@ -25,7 +26,9 @@ final class TableReader implements AutoCloseable {
     private final Iterator<CSVRecord> records;
     private final Decimals decimals;
     private final long mostLines;
+    private final Dialect dialect;
     private final Header header;
+    private final Line headerLine;
     private CSVRecord current;
     private long lines;
 
@@ -34,10 +37,20 @@ final class TableReader implements AutoCloseable {
         this.text = text;
         this.parser = dialect.format().parse(text);
         this.records = parser.iterator();
+        this.dialect = dialect;
         this.decimals = new Decimals(dialect);
         this.mostLines = mostLines;
         this.header = readHeader();
+        this.headerLine = current();
     }
+
+    /**
+     * A line as it is written.
+     *
+     * @param notes the notes above it
+     * @param cells its cells
+     */
+    record Line(List<String> notes, List<String> cells) {}
 
     /**
      * {@return a reader that stands before the first line below the header}
@@ -137,6 +150,26 @@ final class TableReader implements AutoCloseable {
         if (lines > mostLines) {
             throw fault("more lines of values", "at most " + mostLines, "Split the table.");
         }
+    }
+
+    Dialect dialect() {
+        return dialect;
+    }
+
+    /** {@return the header as it is written} */
+    Line headerLine() {
+        return headerLine;
+    }
+
+    /** {@return the current line as it is written} */
+    Line current() {
+        String notes = current.getComment();
+        return new Line(notes == null ? List.of() : List.of(notes.split("\\R")), current.toList());
+    }
+
+    /** {@return the file as the user named it} */
+    String shownName() {
+        return shownName;
     }
 
     /** {@return where the current line ends, from 1} */

@@ -3,8 +3,10 @@ package org.seepledger.io.raster;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
+import java.math.BigInteger;
 import java.nio.ByteBuffer;
 import java.nio.ByteOrder;
+import java.util.Arrays;
 import java.util.zip.DataFormatException;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -50,13 +52,13 @@ class PackingTest {
     }
 
     private static byte[] codes(int... codes) {
-        java.math.BigInteger bits = java.math.BigInteger.ONE;
+        BigInteger bits = BigInteger.ONE;
         for (int code : codes) {
-            bits = bits.shiftLeft(9).or(java.math.BigInteger.valueOf(code));
+            bits = bits.shiftLeft(9).or(BigInteger.valueOf(code));
         }
         int length = (9 * codes.length + 7) / 8;
         byte[] all = bits.shiftLeft(8 * length - 9 * codes.length).toByteArray();
-        return java.util.Arrays.copyOfRange(all, all.length - length, all.length);
+        return Arrays.copyOfRange(all, all.length - length, all.length);
     }
 
     /** 1.0 and -2.0 are 3F800000 and C0000000: planes 3F C0, 80 00, 00 00, 00 00, each byte less the one before. */

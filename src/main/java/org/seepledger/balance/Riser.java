@@ -1,0 +1,47 @@
+package org.seepledger.balance;
+
+/**
+ * A face between two cells of a layer, where a prism's lids may make a step.
+ *
+ * @param layer the layer
+ * @param row the row of the cell that the flow is counted from
+ * @param column its column
+ * @param nextRow the row of the cell that it is counted to
+ * @param nextColumn its column
+ * @param flow what flows from the one to the other through the part of the face inside, length³/time
+ */
+record Riser(int layer, int row, int column, int nextRow, int nextColumn, double flow) {
+
+    /** What leaves through the top's step. */
+    double throughTop(Slab slab) {
+        return flow == 0 ? 0 : flow * (Math.max(high(slab), nextLow(slab)) - Math.max(nextHigh(slab), low(slab)));
+    }
+
+    /** What leaves through the bottom's step. */
+    double throughBottom(Slab slab) {
+        return flow == 0 ? 0 : flow * (Math.min(nextLow(slab), high(slab)) - Math.min(low(slab), nextHigh(slab)));
+    }
+
+    /** What flows from one slab in the first cell to another in the second. */
+    double between(Slab from, Slab to) {
+        return flow == 0
+                ? 0
+                : flow * Math.max(0, Math.min(high(from), nextHigh(to)) - Math.max(low(from), nextLow(to)));
+    }
+
+    private double low(Slab slab) {
+        return slab.low(layer, row, column);
+    }
+
+    private double high(Slab slab) {
+        return slab.high(layer, row, column);
+    }
+
+    private double nextLow(Slab slab) {
+        return slab.low(layer, nextRow, nextColumn);
+    }
+
+    private double nextHigh(Slab slab) {
+        return slab.high(layer, nextRow, nextColumn);
+    }
+}

@@ -1,0 +1,45 @@
+package org.seepledger.balance;
+
+import org.seepledger.aquifer.CellTerm;
+
+/** How a prism's vertical range meets the cells of a block in one interval. */
+interface Slab {
+
+    /** The part of a cell's saturated height below the prism's bottom, from 0 to 1. */
+    double low(int layer, int row, int column);
+
+    /** The part of a cell's saturated height below the prism's top, from 0 to 1, not less than {@link #low}. */
+    double high(int layer, int row, int column);
+
+    /** The part of a cell's saturated height that lies in the prism. */
+    default double part(int layer, int row, int column) {
+        return high(layer, row, column) - low(layer, row, column);
+    }
+
+    /** How much of a term of a cell counts, from 0 to 1. */
+    double counted(CellTerm.Entry entry, int layer, int row, int column);
+
+    /** What the part of a cell within the range sends out through all faces, length³/time, if its plan area is whole. */
+    double outflow(int layer, int row, int column);
+
+    /** The elevation of the prism's top at a column of cells, in length units; NaN where the range misses the column. */
+    double top(int row, int column);
+
+    /** The elevation of the prism's bottom at a column of cells; NaN where the range misses the column. */
+    double bottom(int row, int column);
+
+    /** The layer in which the top lies; only where the range does not miss the column. */
+    int topLayer(int row, int column);
+
+    /** The layer in which the bottom lies. */
+    int bottomLayer(int row, int column);
+
+    /** The upward flow through the top of a whole column of cells, length³/time. */
+    double upwardAtTop(int row, int column);
+
+    /** The upward flow through the bottom of a whole column of cells, length³/time. */
+    double upwardAtBottom(int row, int column);
+
+    /** Whether the lids may have steps within a layer. */
+    boolean hasRisers();
+}

@@ -1,0 +1,63 @@
+package org.seepledger.io.result;
+
+import java.io.IOException;
+import java.io.Writer;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.time.LocalDateTime;
+import java.time.format.DateTimeFormatter;
+import org.apache.commons.csv.CSVFormat;
+import org.apache.commons.csv.CSVPrinter;
+import org.seepledger.aquifer.Times;
+import org.seepledger.io.table.CsvText;
+import org.seepledger.ledger.Period;
+
+/** A table of results being written: notes, a header, rows cell by cell, as RFC 4180 has it. */
+final class ResultTable implements AutoCloseable {
+
+    private final Writer text;
+    private final CSVPrinter rows;
+
+    private ResultTable(Writer text) throws IOException {
+        this.text = text;
+        this.rows = new CSVPrinter(text, CSVFormat.RFC4180);
+    }
+
+    /** Begins a table with its notes and header. */
+    static ResultTable open(Path file, Statement statement, String... header) throws IOException {
+        Writer text = Files.newBufferedWriter(file);
+        for (String line : statement.lines()) {
+            text.write("# " + line + "\r\n");
+        }
+        ResultTable table = new ResultTable(text);
+        table.rows.printRecord((Object[]) header);
+        return table;
+    }
+
+    /** Writes one cell. */
+    void cell(String cell) throws IOException {
+        rows.print(cell);
+    }
+
+    /** Writes four cells: begin and end of a period, as times and as dates where there are dates. */
+    void span(Period period, Times times) throws IOException {
+        rows.print(CsvText.number(period.from()));
+        rows.print(CsvText.number(period.to()));
+        rows.print(times.date(period.from()).map(ResultTable::iso).orElse(""));
+        rows.print(times.date(period.to()).map(ResultTable::iso).orElse(""));
+    }
+
+    void endRow() throws IOException {
+        rows.println();
+    }
+
+    private static String iso(LocalDateTime date) {
+        boolean midnight = date.equals(date.toLocalDate().atStartOfDay());
+        return midnight ? date.toLocalDate().toString() : DateTimeFormatter.ISO_LOCAL_DATE_TIME.format(date);
+    }
+
+    @Override
+    public void close() throws IOException {
+        text.close();
+    }
+}

@@ -1,0 +1,161 @@
+package org.seepledger.job;
+
+import java.util.ArrayList;
+import java.util.Collection;
+import java.util.List;
+import java.util.function.Function;
+import java.util.stream.Stream;
+import org.seepledger.aquifer.Aquifer;
+import org.seepledger.aquifer.StorageKnowledge;
+import org.seepledger.balance.Trace;
+import org.seepledger.fault.UsageFault;
+import org.seepledger.io.NearestName;
+import org.seepledger.io.table.CsvText;
+import org.seepledger.ledger.Account;
+import org.seepledger.ledger.Group;
+import org.seepledger.ledger.Period;
+import org.seepledger.prism.Prism;
+
+/**
+ * A row of a budget, found by its name {@code PRISM/PERIOD/ITEM/LAYER}.
+ *
+ * <p>Names may hold slashes themselves: the text is held against the names that there are, not split. Where an item's
+ * name stands in several groups, {@code PRISM/PERIOD/GROUP/ITEM/LAYER} tells them apart.
+ *
+ * @param prism the prism
+ * @param period the period
+ * @param item its item
+ * @param account the account, as its place among the prism's; -1 for a total
+ */
+record BudgetRow(Prism prism, Period period, Item item, int account) {
+
+    private static final String FORM = "Name it as PRISM/PERIOD/ITEM/LAYER, with the words of budget.csv.";
+    private static final List<String> TOTALS =
+            List.of("inflow", "outflow", "storage change", "residual", "closure error", "net closure error");
+    private static final String UNEXPLAINED = "unexplained, storage included";
+
+    /**
+     * What a row is called within its prism and period.
+     *
+     * @param group its group
+     * @param name the item
+     * @param layer the layer, or {@code *}
+     */
+    record Item(Group group, String name, String layer) {
+
+        String shortName() {
+            return name + "/" + layer;
+        }
+
+        String longName() {
+            return group + "/" + shortName();
+        }
+    }
+
+    /**
+     * {@return the row of a name}
+     *
+     * @param name the name
+     * @param aquifer the aquifer
+     * @param prisms the prisms
+     * @param periods the periods
+     * @throws UsageFault if there is none or more than one; tells the nearest
+     */
+    static BudgetRow of(String name, Aquifer aquifer, List<Prism> prisms, List<Period> periods) {
+        List<Rest<Prism>> ofPrism = after(name, prisms, Prism::name);
+        if (ofPrism.isEmpty()) {
+            throw none(
+                    name, "prism", head(name), prisms.stream().map(Prism::name).toList());
+        }
+        List<BudgetRow> found = new ArrayList<>();
+        UsageFault fault = null;
+        for (Rest<Prism> prism : ofPrism) {
+            List<Rest<Period>> ofPeriod = after(prism.text(), periods, Period::name);
+            if (ofPeriod.isEmpty()) {
+                List<String> names = periods.stream().map(Period::name).toList();
+                fault = none(name, "period", head(prism.text()), names);
+            }
+            List<Account> accounts = Trace.accounts(aquifer, prism.named());
+            List<Item> items = items(accounts, aquifer.storageKnowledge());
+            for (Rest<Period> period : ofPeriod) {
+                List<Integer> matching = matching(period.text(), items);
+                matching.forEach(i -> found.add(
+                        new BudgetRow(prism.named(), period.named(), items.get(i), i < accounts.size() ? i : -1)));
+                if (matching.isEmpty()) {
+                    List<String> names = items.stream().map(Item::shortName).toList();
+                    fault = none(name, "item and layer", period.text(), names);
+                }
+            }
+        }
+        return only(name, found, fault);
+    }
+
+    private static BudgetRow only(String name, List<BudgetRow> found, UsageFault fault) {
+        if (found.isEmpty()) {
+            throw fault;
+        }
+        if (found.size() > 1) {
+            List<String> names = found.stream().map(BudgetRow::longName).toList();
+            throw new UsageFault("--row \"" + name + "\" names several rows; name one of them as \""
+                    + String.join("\" or \"", names) + "\".");
+        }
+        return found.get(0);
+    }
+
+    private String longName() {
+        return prism.name() + "/" + period.name() + "/" + item.longName();
+    }
+
+    String shortName() {
+        return prism.name() + "/" + period.name() + "/" + item.shortName();
+    }
+
+    /** All rows of a period: the accounts, then the totals. */
+    private static List<Item> items(List<Account> accounts, StorageKnowledge storage) {
+        Stream<Item> own = accounts.stream()
+                .map(account -> new Item(account.group(), account.item(), String.valueOf(account.layer() + 1)));
+        Stream<String> unexplained = Stream.of(UNEXPLAINED).filter(name -> storage == StorageKnowledge.UNKNOWN);
+        Stream<Item> totals =
+                Stream.concat(TOTALS.stream(), unexplained).map(total -> new Item(Group.TOTAL, total, "*"));
+        return Stream.concat(own, totals).toList();
+    }
+
+    private static List<Integer> matching(String text, List<Item> items) {
+        List<Integer> matching = new ArrayList<>();
+        for (int i = 0; i < items.size(); i++) {
+            Item item = items.get(i);
+            String asWritten = CsvText.text(item.name()) + "/" + item.layer();
+            if (text.equals(item.shortName()) || text.equals(asWritten) || text.equals(item.longName())) {
+                matching.add(i);
+            }
+        }
+        return matching;
+    }
+
+    /** What follows a name in a text. */
+    private record Rest<T>(T named, String text) {}
+
+    private static <T> List<Rest<T>> after(String text, Collection<T> all, Function<T, String> name) {
+        List<Rest<T>> rests = new ArrayList<>();
+        for (T named : all) {
+            Stream.of(name.apply(named), CsvText.text(name.apply(named)))
+                    .distinct()
+                    .filter(written -> text.startsWith(written + "/"))
+                    .forEach(written -> rests.add(new Rest<>(named, text.substring(written.length() + 1))));
+        }
+        return rests;
+    }
+
+    private static String head(String text) {
+        int slash = text.indexOf('/');
+        return slash < 0 ? text : text.substring(0, slash);
+    }
+
+    private static UsageFault none(String name, String what, String written, List<String> known) {
+        String near = NearestName.of(written, known)
+                .map(nearest -> " The nearest is \"" + nearest + "\".")
+                .orElse(known.size() > 20 ? "" : " There are \"" + String.join("\", \"", known) + "\".");
+        return new UsageFault(
+                "--row \"" + name + "\": there is no " + what + " \"" + written + "\"." + near + " " + FORM);
+    }
+}

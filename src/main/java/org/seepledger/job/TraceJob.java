@@ -1,0 +1,154 @@
+package org.seepledger.job;
+
+import java.io.IOException;
+import java.util.List;
+import java.util.Optional;
+import org.seepledger.aquifer.Aquifer;
+import org.seepledger.balance.Trace;
+import org.seepledger.balance.TracedRow;
+import org.seepledger.balance.WaterBalance;
+import org.seepledger.fault.ProgramFault;
+import org.seepledger.fault.UsageFault;
+import org.seepledger.io.result.ResultUnits;
+import org.seepledger.io.result.Statement;
+import org.seepledger.io.result.TraceCsv;
+import org.seepledger.ledger.Entry;
+import org.seepledger.ledger.Ledger;
+import org.seepledger.ledger.PeriodBudget;
+import org.seepledger.ledger.Totals;
+import org.seepledger.progress.Progress;
+
+/** Where a number of a budget comes from: the stored values that it rests on, each with its weight. */
+public final class TraceJob {
+
+    /** How far value × weight may add up to something else than the row, as a share of the row's gross flow. */
+    public static final double AGREES = 1e-9;
+
+    /** What rounding of the terms may add to that, as a share of the sum of their magnitudes. */
+    private static final double ROUNDING = 1e-14;
+
+    private final TraceRequest request;
+    private final Subject subject;
+    private final Progress progress;
+
+    /** What a row comes to, in the set's own units. */
+    private record Number(double net, double gross) {}
+
+    private TraceJob(TraceRequest request, Subject subject, Progress progress) {
+        this.request = request;
+        this.subject = subject;
+        this.progress = progress;
+    }
+
+    /**
+     * Does the job.
+     *
+     * @param request what is asked for
+     * @param progress told how far the work is
+     * @return the summary, lines of text; the file is in place
+     * @throws UsageFault if the request cannot be met, there is no such row, or it has no number
+     * @throws org.seepledger.fault.DataFault if the data are wrong; nothing is written then
+     * @throws ProgramFault if the trace does not add up to the row; nothing is written then
+     * @throws org.seepledger.progress.Cancelled if the work was stopped; nothing is written then
+     * @throws IOException if a file cannot be read or written
+     */
+    public static String run(TraceRequest request, Progress progress) throws IOException {
+        try (OutputFile out = OutputFile.at(request.out(), request.overwrite(), "# " + TraceCsv.TITLE);
+                Subject subject = Subject.open(request.aquifer(), request.prisms(), request.clip())) {
+            return new TraceJob(request, subject, progress).run(out);
+        }
+    }
+
+    private String run(OutputFile out) throws IOException {
+        Aquifer aquifer = subject.aquifer();
+        ResultUnits units = subject.units(request.rateUnit(), Optional.empty());
+        BudgetRow row = BudgetRow.of(
+                request.row(),
+                aquifer,
+                subject.prisms(),
+                subject.periods(request.every(), request.periods(), request.waterYearStart()));
+        Ledger ledger = WaterBalance.of(aquifer, List.of(row.prism()), request.wells(), request.threads(), progress)
+                .ledgers()
+                .get(0);
+        TracedRow traced = traced(row, ledger);
+        Number number = number(row, ledger.budget(row.period()), units);
+        Statement statement = new Statement(
+                TraceCsv.TITLE + "\"" + row.shortName() + "\" in \"" + aquifer.name() + "\" by seepledger "
+                        + Version.text(),
+                subject.inputs(progress),
+                subject.folder().origins(),
+                subject.warnings());
+        Trace.Sum sum;
+        try (TraceCsv table = TraceCsv.open(out.path(), statement, notes(number, units))) {
+            sum = Trace.of(
+                    aquifer, row.prism(), request.wells(), traced, row.period(), units.rateFactor(), table, progress);
+        }
+        check(row, number, sum);
+        out.publish();
+        return summary(row, number, sum, units);
+    }
+
+    private static TracedRow traced(BudgetRow row, Ledger ledger) {
+        if (row.account() >= 0) {
+            return TracedRow.of(row.account(), ledger.accounts());
+        }
+        String name = row.item().name();
+        return TracedRow.total(name, ledger.accounts())
+                .orElseThrow(
+                        () -> new UsageFault(
+                                "\"" + row.shortName()
+                                        + "\" is a ratio of sums and has no weights. Trace \"residual/*\" of the same prism and period."));
+    }
+
+    private static Number number(BudgetRow row, PeriodBudget budget, ResultUnits units) {
+        double perVolume = units.rateFactor() / row.period().duration();
+        double net;
+        double gross;
+        if (row.account() >= 0) {
+            Entry entry = budget.entries().get(row.account());
+            net = entry.net();
+            gross = entry.inflow() + entry.outflow();
+        } else {
+            Totals totals = budget.totals();
+            gross = totals.throughput();
+            net = switch (row.item().name()) {
+                case "inflow" -> totals.inflow();
+                case "outflow" -> totals.outflow();
+                case "storage change" -> totals.storageChange();
+                case "residual" -> totals.residual();
+                default -> totals.inflow() - totals.outflow();
+            };
+        }
+        if (Double.isNaN(net)) {
+            throw new UsageFault("\"" + row.shortName()
+                    + "\" has no number: it is empty in the budget, whose warnings say why. Trace another row.");
+        }
+        return new Number(net * perVolume, gross * perVolume);
+    }
+
+    private List<String> notes(Number number, ResultUnits units) {
+        return List.of(
+                "net_rate: " + number.net() + " " + units.rate()
+                        + "; value x weight over all lines adds up to it, within " + AGREES
+                        + " of the row's gross flow. Lines of the same place add.",
+                "value: as it stands in the file, before scale, offset and unit. weight: what net_rate grows by for each"
+                        + " unit of it, all else as it stands. Flow was given as "
+                        + subject.aquifer().flow().given() + ".",
+                "An offset and a number in aquifer.json are lines of their own. A dry cell's head has weight 0, and its"
+                        + " bottom stands in for it.");
+    }
+
+    private static void check(BudgetRow row, Number number, Trace.Sum sum) {
+        double difference = Math.abs(sum.value() - number.net());
+        if (!(difference <= AGREES * number.gross() + ROUNDING * sum.magnitude())) {
+            throw new ProgramFault("The trace of \"" + row.shortName() + "\" adds up to " + sum.value()
+                    + ", but the row's net rate is " + number.net() + ".");
+        }
+    }
+
+    private String summary(BudgetRow row, Number number, Trace.Sum sum, ResultUnits units) {
+        return "\"" + row.shortName() + "\": net rate " + number.net() + " " + units.rate() + "\n"
+                + "Value × weight over " + sum.lines() + " lines: " + sum.value() + " " + units.rate() + "\n"
+                + "Written to " + request.out() + "\n";
+    }
+}

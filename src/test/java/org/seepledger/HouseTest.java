@@ -1,0 +1,216 @@
+package org.seepledger;
+
+import static com.tngtech.archunit.base.DescribedPredicate.describe;
+import static com.tngtech.archunit.core.domain.JavaCall.Predicates.target;
+import static com.tngtech.archunit.core.domain.properties.HasName.Predicates.name;
+import static com.tngtech.archunit.core.domain.properties.HasOwner.Predicates.With.owner;
+import static com.tngtech.archunit.lang.syntax.ArchRuleDefinition.classes;
+import static com.tngtech.archunit.lang.syntax.ArchRuleDefinition.noClasses;
+import static com.tngtech.archunit.library.dependencies.SlicesRuleDefinition.slices;
+
+import com.tngtech.archunit.base.DescribedPredicate;
+import com.tngtech.archunit.core.domain.JavaClass;
+import com.tngtech.archunit.core.importer.ImportOption;
+import com.tngtech.archunit.junit.AnalyzeClasses;
+import com.tngtech.archunit.junit.ArchTest;
+import com.tngtech.archunit.lang.ArchCondition;
+import com.tngtech.archunit.lang.ArchRule;
+import com.tngtech.archunit.lang.ConditionEvents;
+import com.tngtech.archunit.lang.SimpleConditionEvent;
+import java.util.List;
+
+/** The rules of the house: which package may know which, and who may do what. */
+@AnalyzeClasses(packages = "org.seepledger", importOptions = ImportOption.DoNotIncludeTests.class)
+class HouseTest {
+
+    private static final String ROOT = "org.seepledger.";
+
+    /** From the top down; packages of one floor do not know each other. */
+    private static final List<List<String>> FLOORS = List.of(
+            List.of("cli", "desktop"),
+            List.of("job"),
+            List.of("intake"),
+            List.of("report"),
+            List.of("io"),
+            List.of("picture"),
+            List.of("ensemble"),
+            List.of("review"),
+            List.of("uncertainty"),
+            List.of("plume"),
+            List.of("balance"),
+            List.of("sketch"),
+            List.of("prism"),
+            List.of("aquifer"),
+            List.of("ledger"),
+            List.of("statistics"),
+            List.of("unit", "fault", "progress"));
+
+    private static final String[] ENGINE = {
+        ROOT + "balance..", ROOT + "plume..", ROOT + "prism..", ROOT + "aquifer..", ROOT + "ledger..",
+    };
+
+    @ArchTest
+    static final ArchRule EVERY_PACKAGE_HAS_A_FLOOR = classes()
+            .should(new ArchCondition<>("live in a package that has its place") {
+                @Override
+                public void check(JavaClass type, ConditionEvents events) {
+                    boolean placed = floor(type) >= 0;
+                    events.add(new SimpleConditionEvent(type, placed, type.getName() + " has no floor"));
+                }
+            })
+            .because("a package without a place in the order could become a back door between two that have one");
+
+    @ArchTest
+    static final ArchRule ARROWS_GO_DOWN = classes()
+            .should(new ArchCondition<>("depend only on packages further down") {
+                @Override
+                public void check(JavaClass type, ConditionEvents events) {
+                    type.getDirectDependenciesFromSelf().stream()
+                            .filter(dependency -> isOurs(dependency.getTargetClass()))
+                            .filter(dependency -> !mayKnow(type, dependency.getTargetClass()))
+                            .forEach(dependency ->
+                                    events.add(SimpleConditionEvent.violated(type, dependency.getDescription())));
+                }
+            })
+            .because("whoever reads a package need know only what lies below it; leaves know nobody, and the window and"
+                    + " the command line never lean on each other");
+
+    @ArchTest
+    static final ArchRule READERS_HAVE_NO_CYCLES = slices().matching(ROOT + "io.(*)..")
+            .should()
+            .beFreeOfCycles()
+            .because("each kind of file can then be read, tested and replaced by itself");
+
+    @ArchTest
+    static final ArchRule PACKAGES_HAVE_NO_CYCLES = slices().matching(ROOT + "(**)")
+            .should()
+            .beFreeOfCycles()
+            .because("two packages that need each other are one package");
+
+    @ArchTest
+    static final ArchRule FORMATS_STAY_IN_IO = noClasses()
+            .that()
+            .resideOutsideOfPackage(ROOT + "io..")
+            .should()
+            .dependOnClassesThat()
+            .resideInAnyPackage(
+                    "org.geotools..", "com.fasterxml..", "org.apache.commons.csv..", "com.networknt..", "org.ejml..")
+            .because("a library that reads or writes files can then be changed in one place");
+
+    @ArchTest
+    static final ArchRule UNIT_LIBRARY_STAYS_IN_UNIT = noClasses()
+            .that()
+            .resideOutsideOfPackages(ROOT + "unit..", ROOT + "io.crs..")
+            .should()
+            .dependOnClassesThat()
+            .resideInAnyPackage("javax.measure..", "tech.units..", "tech.uom..")
+            .because("everybody else speaks of units as users write them; the axes of a CRS come with the library's");
+
+    @ArchTest
+    static final ArchRule OPTIONS_STAY_IN_CLI = noClasses()
+            .that()
+            .resideOutsideOfPackage(ROOT + "cli..")
+            .should()
+            .dependOnClassesThat()
+            .resideInAPackage("picocli..")
+            .because("a job must not know whether a command line or a window asked for it");
+
+    @ArchTest
+    static final ArchRule ENGINE_KNOWS_NO_FILES = noClasses()
+            .that()
+            .resideInAnyPackage(ENGINE)
+            .should()
+            .dependOnClassesThat(describe("files", HouseTest::isAboutFiles))
+            .because("the engine asks suppliers for one interval and band at a time, wherever they have it from");
+
+    @ArchTest
+    static final ArchRule ENGINE_KNOWS_NO_WINDOWS = noClasses()
+            .that()
+            .resideInAnyPackage(ENGINE)
+            .should()
+            .dependOnClassesThat()
+            .resideInAnyPackage("java.awt..", "javax.swing..", "javafx..")
+            .because("the same engine serves the command line, the window and the tests");
+
+    @ArchTest
+    static final ArchRule ONLY_CLI_EXITS = noClasses()
+            .that()
+            .resideOutsideOfPackage(ROOT + "cli..")
+            .should()
+            .callMethodWhere(target(owner(type("java.lang.System")))
+                    .and(target(name("exit")))
+                    .or(target(owner(type("java.lang.Runtime"))).and(target(name("halt")))))
+            .because("who calls a job must get an answer, not an end");
+
+    @ArchTest
+    static final ArchRule ONLY_CLI_PRINTS = noClasses()
+            .that()
+            .resideOutsideOfPackage(ROOT + "cli..")
+            .should()
+            .accessField(System.class, "out")
+            .orShould()
+            .accessField(System.class, "err")
+            .orShould()
+            .callMethod(Throwable.class, "printStackTrace")
+            .because("what a run has to say is a result, and goes where the caller wants it");
+
+    @ArchTest
+    static final ArchRule CLI_AND_DESKTOP_ARE_STRANGERS = noClasses()
+            .that()
+            .resideInAPackage(ROOT + "desktop..")
+            .should()
+            .dependOnClassesThat()
+            .resideInAPackage(ROOT + "cli..")
+            .allowEmptyShould(true)
+            .because("what both need belongs to a job");
+
+    @ArchTest
+    static final ArchRule NAMES_SAY_WHAT_A_THING_IS = noClasses()
+            .should()
+            .haveSimpleNameEndingWith("Util")
+            .orShould()
+            .haveSimpleNameEndingWith("Utils")
+            .orShould()
+            .haveSimpleNameEndingWith("Helper")
+            .orShould()
+            .haveSimpleNameEndingWith("Manager")
+            .orShould()
+            .haveSimpleNameEndingWith("Impl")
+            .orShould()
+            .haveNameMatching(".*[.$]Base[A-Z]\\w*")
+            .because("a class named by what it is in the trade cannot become a dumping ground");
+
+    private static DescribedPredicate<JavaClass> type(String name) {
+        return describe(name, type -> type.getName().equals(name));
+    }
+
+    /** Being serialisable and passing a read error on are no dealings with files. */
+    private static boolean isAboutFiles(JavaClass type) {
+        String name = type.getName();
+        return name.startsWith("java.nio.file.")
+                || name.startsWith("java.nio.channels.")
+                || name.startsWith("java.io.") && !name.equals("java.io.Serializable");
+    }
+
+    private static boolean isOurs(JavaClass type) {
+        return type.getName().startsWith(ROOT);
+    }
+
+    private static boolean mayKnow(JavaClass type, JavaClass other) {
+        return idea(type).equals(idea(other)) || floor(type) < floor(other);
+    }
+
+    private static int floor(JavaClass type) {
+        for (int floor = 0; floor < FLOORS.size(); floor++) {
+            if (FLOORS.get(floor).contains(idea(type))) {
+                return floor;
+            }
+        }
+        return -1;
+    }
+
+    /** The package directly below the root. */
+    private static String idea(JavaClass type) {
+        return type.getPackageName().substring(ROOT.length()).replaceFirst("\\..*", "");
+    }
+}

@@ -1,0 +1,71 @@
+package org.seepledger.cli;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
+
+/** What a newcomer reads first; the examples in it work from the project's folder. */
+class HelpTest {
+
+    @TempDir
+    Path folder;
+
+    @Test
+    void printsUsageWithoutArguments() {
+        Ran ran = Ran.of();
+        assertThat(ran.out()).startsWith("Usage: seepledger").contains("inspect", "balance", "Exit status");
+        assertThat(ran.err()).isEmpty();
+    }
+
+    @Test
+    void printsTheVersion() {
+        Ran ran = Ran.of("--version");
+        assertThat(ran.status()).isZero();
+        assertThat(ran.out()).matches("seepledger \\d+\\.\\d+\\.\\d+\\S*\\R");
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"", "inspect", "balance"})
+    void givesAnExampleThatWorks(String command) {
+        Ran help = command.isEmpty() ? Ran.of("--help") : Ran.of(command, "--help");
+        assertThat(help.status()).isZero();
+        assertThat(help.err()).isEmpty();
+        List<String> examples = help.out()
+                .replaceAll(" \\\\\\R *", " ")
+                .lines()
+                .map(String::strip)
+                .filter(line -> line.startsWith("seepledger ") && line.contains("sample-aquifers/terrace"))
+                .toList();
+        assertThat(examples).isNotEmpty();
+        for (String example : examples) {
+            List<String> arguments = new ArrayList<>(List.of(example.split(" ")));
+            arguments.remove(0);
+            arguments.replaceAll(
+                    word -> word.equals("budget") ? folder.resolve("out").toString() : word);
+            Ran ran = Ran.of(arguments.toArray(String[]::new));
+            assertThat(ran.err()).as(example).isEmpty();
+            assertThat(ran.status()).as(example).isZero();
+        }
+    }
+
+    @Test
+    void fitsTheTerminal() {
+        for (String[] command : new String[][] {{"--help"}, {"inspect", "--help"}, {"balance", "--help"}}) {
+            assertThat(Ran.of(command).out().lines()).allMatch(line -> line.length() <= 100);
+        }
+    }
+
+    @Test
+    void namesTheCommandThatWasProbablyMeant() {
+        Ran ran = Ran.of("balanc");
+        assertThat(ran.status()).isEqualTo(2);
+        assertThat(ran.err()).contains("'balanc'", "Did you mean balance?", "See seepledger --help.");
+        assertThat(ran.err().lines()).hasSize(1);
+    }
+}

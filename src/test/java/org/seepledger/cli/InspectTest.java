@@ -1,0 +1,140 @@
+package org.seepledger.cli;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.nio.file.Path;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
+
+/** What {@code inspect} tells of a set, and what it doubts. */
+class InspectTest {
+
+    @TempDir
+    Path folder;
+
+    private static String inspected(AquiferFiles files) {
+        Ran ran = files.inspect();
+        assertThat(ran.err()).isEmpty();
+        assertThat(ran.status()).isZero();
+        return ran.out();
+    }
+
+    private static String warnings(AquiferFiles files) {
+        String text = inspected(files);
+        String rest = text.substring(text.indexOf("\nWarnings\n") + 10);
+        return rest.substring(0, rest.indexOf("\n\n"));
+    }
+
+    private AquiferFiles files() {
+        return new AquiferFiles(folder);
+    }
+
+    @Test
+    void tellsWhatTheSetIs() {
+        String text = inspected(files().with("start_date", "'2021-10-01'")
+                .with("vertical_datum", "'local'")
+                .with("sources", "[{'category': 'recharge', 'kind': 'areal', 'rate': {'file': 'r.csv'}}]")
+                .file("r.csv", "row,col,rate [mm/yr]\n1,1,365.25\n3,4,0\n"));
+        assertThat(text)
+                .contains("Aquifer \"Invented test\"")
+                .contains("4 columns of 10, 3 rows of 10")
+                .contains("2 intervals, 0 to 20 d, 2021-10-01 to 2021-10-21")
+                .contains("vertical datum local")
+                .contains("1  layer 1 (water table)", "2  layer 2\n")
+                .containsPattern("recharge +m/d +0 +0\\.001000 +\\d+ +\\d+")
+                .containsPattern("flow x +m/d +0\\.1000 +0\\.1000");
+        assertThat(text).contains("How the set balances in itself");
+    }
+
+    @Test
+    void hasNoDoubtsAboutAPlainSet() {
+        assertThat(warnings(files().with("flow/z", "1e-3"))).isEqualTo("  none");
+    }
+
+    @Test
+    void writesNothing() {
+        inspected(files());
+        assertThat(files().left()).containsExactly("aquifer", "prisms.geojson");
+    }
+
+    @ParameterizedTest
+    @CsvSource(
+            delimiter = '|',
+            value = {
+                "-9999 | 1 | -9999.0",
+                "-999 | 1 | -999.0",
+                "1e30 | 1 | E30",
+                "-9999 | 0.001 | -9999 in mm",
+            })
+    void doubtsMarksForNoValue(float mark, double scale, String shown) {
+        AquiferFiles files = files().with("head", "{'file': 'h.tif', 'unit': '" + (scale == 1 ? "m" : "mm") + "'}")
+                .file(
+                        "h.tif",
+                        new TinyTiff(3, 4)
+                                .band((row, column) -> row == 1 && column == 2 ? mark : 9)
+                                .bytes());
+        assertThat(warnings(files)).contains("\"head\"", shown, "row 2, column 3", "a mark for \"no value\"");
+    }
+
+    @Test
+    void doubtsMarksInOtherUnits() {
+        AquiferFiles files = files().with(
+                        "sources", "[{'category': 'recharge', 'kind': 'areal', 'rate': {'file': 'r.csv'}}]")
+                .file("r.csv", "row,col,rate [mm/yr]\n1,1,200\n2,2,-9999\n");
+        assertThat(warnings(files)).contains("\"recharge\"", "-9999", "mm/yr", "row 2, column 2", "a mark");
+    }
+
+    @ParameterizedTest
+    @CsvSource(
+            delimiter = '|',
+            value = {
+                "flow/x | 150 | seepage velocity",
+                "flow/x | {'value': 0.002, 'unit': 'm/s'} | seepage velocity",
+                "flow/x | 0 | \"flow x\" is 0 everywhere",
+                "storage | {'specific_yield': 20, 'specific_storage': 0} | a fraction between 0 and 1",
+                "storage | {'specific_yield': 0.6, 'specific_storage': 0} | \"specific yield\" reaches 0.6000",
+                "storage | {'specific_yield': 0.2, 'specific_storage': 0.5} | \"specific storage\" reaches 0.5 1/m",
+                "sources | [{'category': 'rain', 'kind': 'areal', 'rate': 0.1}] | no climate brings so much",
+                "sources | [{'category': 'Pumping', 'kind': 'areal', 'rate': 0.001}] | \"Pumping\" adds water in places",
+                "sources | [{'category': 'evapotranspiration', 'kind': 'areal', 'rate': 0.001}] | check the sign",
+                "layers | [{'top': 1e5, 'bottom': 5}, {'bottom': 0}] | check its unit",
+            })
+    void doubtsWhatIsHardlyEverSo(String key, String value, String words) {
+        assertThat(warnings(files().with(key, value))).contains(words);
+    }
+
+    @Test
+    void doubtsAnOpenTopBesideRecharge() {
+        AquiferFiles files = files().with("flow/outer_faces", "{'top': 'open'}")
+                .with("sources", "[{'category': 'recharge', 'kind': 'areal', 'rate': 0}]");
+        assertThat(warnings(files)).contains("recharge may be counted twice");
+        assertAtTheTop(files, "recharge may be counted twice");
+    }
+
+    @Test
+    void doubtsFluxInAWaterTableLayerWithoutHeads() {
+        AquiferFiles files = files().without("head");
+        assertThat(warnings(files)).contains("No heads are given: the full thickness", "storage is not known");
+        assertAtTheTop(files, "No heads are given: the full thickness");
+        assertThat(warnings(files.with("layers", "[{'top': 10, 'bottom': 5, 'water_table': false}, {'bottom': 0}]")))
+                .doesNotContain("full thickness");
+    }
+
+    @Test
+    void doubtsSnapshots() {
+        assertThat(warnings(files().with("flow/at", "'instant'"))).contains("snapshots");
+    }
+
+    @Test
+    void tellsWhereGivenFacesDiffer() {
+        AquiferFiles files = files().with("flow", "{'kind': 'face_flow', 'east': 1, 'north': 0, 'up': 0, 'west': 3}");
+        assertThat(warnings(files)).contains("the greatest difference is 2", "east face of layer 1, row 1, column 1");
+    }
+
+    private static void assertAtTheTop(AquiferFiles files, String warning) {
+        String report = files.balance().out();
+        assertThat(report.indexOf(warning)).isBetween(0, report.indexOf("\nblock\n"));
+    }
+}
