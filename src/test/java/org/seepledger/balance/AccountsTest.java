@@ -1,6 +1,7 @@
 package org.seepledger.balance;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.tuple;
 import static org.assertj.core.api.Assertions.within;
 
 import java.util.Arrays;
@@ -110,9 +111,8 @@ class AccountsTest {
         Aquifer aquifer = AquiferDraft.on(GRID).flow(uniform(2, closed)).done();
         Balance balance = balance(aquifer, corner);
         assertThat(balance.notes().closedSides())
-                .containsExactly(
-                        new RunNotes.ClosedSide("corner", "side 1", "side 1", true),
-                        new RunNotes.ClosedSide("corner", "side 4", "side 4", true));
+                .extracting(RunNotes.ClosedSide::prism, RunNotes.ClosedSide::item)
+                .containsExactly(tuple("corner", "side 1"), tuple("corner", "side 4"));
         BudgetReading budget = BudgetReading.of(aquifer, balance).get(0);
         assertThat(budget.in("side 4")).isNaN();
         assertThat(budget.out("side 2")).isEqualTo(400, within(1e-11));

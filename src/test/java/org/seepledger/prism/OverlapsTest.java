@@ -60,6 +60,13 @@ class OverlapsTest {
     }
 
     @Test
+    void aTinyPrismWithinALargeOneOverlapsIt() {
+        Layers all = new Layers(0, 2);
+        assertThat(OVERLAPS.of(List.of(box("A", 5, 5, 5.0001, 5.0001, all), box("B", 0, 0, 10, 10, all))))
+                .hasSize(1);
+    }
+
+    @Test
     void layersOverlapWhenTheyHaveOneInCommon() {
         assertThat(ofRanges(new Layers(0, 0), new Layers(1, 2))).isEmpty();
         assertThat(ofRanges(new Layers(0, 1), new Layers(1, 2))).hasSize(1);
