@@ -44,7 +44,11 @@ final class BalanceCommand implements Callable<Integer> {
     @Parameters(paramLabel = "AQUIFER", description = "The folder with aquifer.json.")
     private Path aquifer;
 
-    @Option(names = "--prisms", paramLabel = "F", required = true, description = "The prisms, as GeoJSON: polygons, each with a name.")
+    @Option(
+            names = "--prisms",
+            paramLabel = "F",
+            required = true,
+            description = "The prisms, as GeoJSON: polygons, each with a name.")
     private Path prisms;
 
     @Option(
@@ -78,7 +82,10 @@ final class BalanceCommand implements Callable<Integer> {
             description = "The month in which a water year begins, 1 to 12 (default: 10).")
     private int waterYearStart = 10;
 
-    @Option(names = "--rate-unit", paramLabel = "UNIT", description = "Unit of rates, such as L/s (default: the set's own).")
+    @Option(
+            names = "--rate-unit",
+            paramLabel = "UNIT",
+            description = "Unit of rates, such as L/s (default: the set's own).")
     private String rateUnit;
 
     @Option(

@@ -21,8 +21,28 @@ final class NoValueMarks {
     private static final double SAME = 1e-7;
 
     private static final List<Measure> UNITS = List.of(
-                    "m", "cm", "mm", "km", "ft", "m/d", "mm/d", "m/s", "m/yr", "mm/yr", "cm/yr", "in/yr", "ft/d", "m3/d",
-                    "m3/s", "m3/h", "m3/yr", "L/s", "ft3/d", "ft3/s", "gal/min", "acre-ft/yr")
+                    "m",
+                    "cm",
+                    "mm",
+                    "km",
+                    "ft",
+                    "m/d",
+                    "mm/d",
+                    "m/s",
+                    "m/yr",
+                    "mm/yr",
+                    "cm/yr",
+                    "in/yr",
+                    "ft/d",
+                    "m3/d",
+                    "m3/s",
+                    "m3/h",
+                    "m3/yr",
+                    "L/s",
+                    "ft3/d",
+                    "ft3/s",
+                    "gal/min",
+                    "acre-ft/yr")
             .stream()
             .map(Measure::of)
             .toList();

@@ -140,16 +140,19 @@ class BalanceOptionsTest {
     void showsProgressOnStandardErrorIfAsked() {
         AquiferFiles files = new AquiferFiles(folder);
         assertThat(files.balance("--progress").err()).contains("balancing: 2 steps");
-        assertThat(files.balanceAsItStands("--overwrite", "--no-progress").err()).isEmpty();
-        assertThat(files.balanceAsItStands("--overwrite").err()).as("nobody watches").isEmpty();
+        assertThat(files.balanceAsItStands("--overwrite", "--no-progress").err())
+                .isEmpty();
+        assertThat(files.balanceAsItStands("--overwrite").err())
+                .as("nobody watches")
+                .isEmpty();
     }
 
     /** 0.003 m/d of recharge on 200 m2 is not in the flux: of 13.2 m3/d that come in, 0.6 go nowhere. */
     @ParameterizedTest
     @CsvSource({"4.6, 0", "4.5, 4", "0, 4", "100, 0"})
     void failsBeyondTheGreatestClosureError(String percent, int status) {
-        AquiferFiles files = new AquiferFiles(folder)
-                .with("sources", "[{'category': 'recharge', 'kind': 'areal', 'rate': 0.003}]");
+        AquiferFiles files =
+                new AquiferFiles(folder).with("sources", "[{'category': 'recharge', 'kind': 'areal', 'rate': 0.003}]");
         Ran ran = files.balance("--max-closure-error", percent);
         assertThat(ran.err()).isEmpty();
         assertThat(ran.status()).isEqualTo(status);

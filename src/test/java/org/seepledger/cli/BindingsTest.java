@@ -63,7 +63,8 @@ class BindingsTest {
                 "{'file': 'header.csv', 'column': 'qx'}",
             })
     void byLayer(String binding) {
-        AquiferFiles files = files("a").with("flow/x", binding)
+        AquiferFiles files = files("a")
+                .with("flow/x", binding)
                 .file("q_l1.tif", raster(0.25).bytes())
                 .file("q_l2.tif", raster(0.5).bytes())
                 .file("half.tif", raster(0.125).bytes())
@@ -96,7 +97,8 @@ class BindingsTest {
                 "{'file': 'q_{interval}.tif', 'band': 'layer'}",
             })
     void byInterval(String binding) {
-        AquiferFiles files = files("a").with("flow/x", binding)
+        AquiferFiles files = files("a")
+                .with("flow/x", binding)
                 .file("q_1.tif", raster(0.25, 0.25).bytes())
                 .file("q_2.tif", raster(0.5, 0.5).bytes())
                 .file("bands.tif", raster(0.25, 0.5).bytes())
@@ -110,10 +112,10 @@ class BindingsTest {
 
     /** Snapshots 0.1, 0.3, 0.7: intervals take the means of their ends. */
     @ParameterizedTest
-    @ValueSource(
-            strings = {"'q_{instant}.tif'", "{'file': 'bands.tif', 'band': 'instant'}", "{'file': 'times.csv'}"})
+    @ValueSource(strings = {"'q_{instant}.tif'", "{'file': 'bands.tif', 'band': 'instant'}", "{'file': 'times.csv'}"})
     void snapshots(String binding) {
-        AquiferFiles files = files("a").with("flow/x", binding)
+        AquiferFiles files = files("a")
+                .with("flow/x", binding)
                 .with("flow/at", "'instant'")
                 .file("q_0.tif", raster(0.125).bytes())
                 .file("q_1.tif", raster(0.375).bytes())
@@ -137,7 +139,8 @@ class BindingsTest {
                 "{'file': 'h_{instant}.tif', 'unit': 'm'}",
             })
     void headsAtInstants(String binding) {
-        AquiferFiles files = files("a").with("head", binding)
+        AquiferFiles files = files("a")
+                .with("head", binding)
                 .with("storage", "{'specific_yield': [0.2, 0.9], 'specific_storage': 0}")
                 .file("h_0.tif", raster(9).bytes())
                 .file("h_1.tif", raster(8).bytes())
@@ -163,7 +166,8 @@ class BindingsTest {
                 "{'file': 'cm_{instant}.tif', 'dry': -888.88, 'unit': 'cm'}",
             })
     void dryHeads(String binding) {
-        AquiferFiles files = files("a").with("head", "[" + binding + ", {'file': 'deep.csv'}]")
+        AquiferFiles files = files("a")
+                .with("head", "[" + binding + ", {'file': 'deep.csv'}]")
                 .with("storage", "{'specific_yield': 0.2, 'specific_storage': 0}")
                 .file("h_0.tif", raster(9).bytes())
                 .file("h_1.tif", raster(-888.88).bytes())
@@ -188,15 +192,20 @@ class BindingsTest {
         for (int row = 0; row < 3; row++) {
             for (int column = 0; column < 4; column++) {
                 table.append(row + 1).append(',').append(column + 1).append(',');
-                table.append(flux.at(row, column)).append(',').append(head.at(row, column)).append('\n');
+                table.append(flux.at(row, column))
+                        .append(',')
+                        .append(head.at(row, column))
+                        .append('\n');
             }
         }
         String slanted = "'type': 'Polygon', 'coordinates': [[[7,3],[33,9],[28,26],[11,21],[7,3]]]";
-        Budget fromTable = budget(files("table").with("flow/x", "{'file': 'v.csv', 'column': 'qx'}")
+        Budget fromTable = budget(files("table")
+                .with("flow/x", "{'file': 'v.csv', 'column': 'qx'}")
                 .with("head", "{'file': 'v.csv', 'column': 'h'}")
                 .file("v.csv", table.toString())
                 .prism("p", "", slanted));
-        Budget fromRasters = budget(files("rasters").with("flow/x", "'qx.tif'")
+        Budget fromRasters = budget(files("rasters")
+                .with("flow/x", "'qx.tif'")
                 .with("head", "'h.tif'")
                 .file("qx.tif", new TinyTiff(3, 4).band(flux).bytes())
                 .file("h.tif", new TinyTiff(3, 4).band(head).bytes())
@@ -206,7 +215,8 @@ class BindingsTest {
 
     @Test
     void takesTheGridOfARaster() {
-        AquiferFiles like = files("like").with("grid", "{'like': 'ground.tif'}")
+        AquiferFiles like = files("like")
+                .with("grid", "{'like': 'ground.tif'}")
                 .file("ground.tif", raster(10).bytes())
                 .with("layers", "[{'top': 'ground.tif', 'bottom': 5}, {'bottom': 0}]");
         assertThat(budget(like).table()).isEqualTo(budget(files("plain")).table());
@@ -215,7 +225,8 @@ class BindingsTest {
     /** Columns of 10, 20 and 5 m: a raster has no way to say that. */
     @Test
     void matchesARasterOfAnUnevenGridByItsShape() {
-        AquiferFiles files = files("a").with("grid/x", "{'edges': [0, 10, 30, 35, 40]}")
+        AquiferFiles files = files("a")
+                .with("grid/x", "{'edges': [0, 10, 30, 35, 40]}")
                 .with("flow/x", "'qx.tif'")
                 .file("qx.tif", raster(0.25).nowhere().bytes());
         Ran ran = files.balance();
@@ -226,7 +237,8 @@ class BindingsTest {
 
     @Test
     void warnsOfRastersInAnotherCrs() {
-        AquiferFiles files = files("a").with("crs", "'EPSG:32633'")
+        AquiferFiles files = files("a")
+                .with("crs", "'EPSG:32633'")
                 .with("flow/x", "'q_l{layer}.tif'")
                 .with("head", "'h.tif'")
                 .prismsIn("EPSG:32633")
@@ -242,7 +254,8 @@ class BindingsTest {
 
     @Test
     void placeWithoutValueIsInactive() {
-        AquiferFiles files = files("a").with("flow/x", "'q.tif'")
+        AquiferFiles files = files("a")
+                .with("flow/x", "'q.tif'")
                 .file(
                         "q.tif",
                         new TinyTiff(3, 4)

@@ -216,7 +216,9 @@ class BudgetCsvTest {
     void keepsFormulasOfSpreadsheetsFromRunning() throws IOException {
         String category = "=HYPERLINK(\"x\",\"y\")";
         AquiferFiles files = new AquiferFiles(folder)
-                .with("sources", "[{'category': '@SUM(A1)', 'kind': 'areal', 'rate': 0}, {'category': '\\t=1', 'kind': 'areal', 'rate': 0}]")
+                .with(
+                        "sources",
+                        "[{'category': '@SUM(A1)', 'kind': 'areal', 'rate': 0}, {'category': '\\t=1', 'kind': 'areal', 'rate': 0}]")
                 .prism("+cmd, \"quoted\" x", "", AquiferFiles.BLOCK)
                 .prism(category, "'boundaries': {'-river': ['side 1-2']}", AquiferFiles.BLOCK);
         Budget budget = budget(files, "--periods", periods("=A1,0,20\n"));

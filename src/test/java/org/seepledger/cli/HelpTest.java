@@ -46,7 +46,8 @@ class HelpTest {
         for (String example : examples) {
             List<String> arguments = new ArrayList<>(List.of(example.split(" ")));
             arguments.remove(0);
-            arguments.replaceAll(word -> word.equals("budget") ? folder.resolve("out").toString() : word);
+            arguments.replaceAll(
+                    word -> word.equals("budget") ? folder.resolve("out").toString() : word);
             Ran ran = Ran.of(arguments.toArray(String[]::new));
             assertThat(ran.err()).as(example).isEmpty();
             assertThat(ran.status()).as(example).isZero();

@@ -33,8 +33,7 @@ class InspectTest {
 
     @Test
     void tellsWhatTheSetIs() {
-        String text = inspected(files()
-                .with("start_date", "'2021-10-01'")
+        String text = inspected(files().with("start_date", "'2021-10-01'")
                 .with("vertical_datum", "'local'")
                 .with("sources", "[{'category': 'recharge', 'kind': 'areal', 'rate': {'file': 'r.csv'}}]")
                 .file("r.csv", "row,col,rate [mm/yr]\n1,1,365.25\n3,4,0\n"));
@@ -71,14 +70,18 @@ class InspectTest {
             })
     void doubtsMarksForNoValue(float mark, double scale, String shown) {
         AquiferFiles files = files().with("head", "{'file': 'h.tif', 'unit': '" + (scale == 1 ? "m" : "mm") + "'}")
-                .file("h.tif", new TinyTiff(3, 4).band((row, column) -> row == 1 && column == 2 ? mark : 9).bytes());
+                .file(
+                        "h.tif",
+                        new TinyTiff(3, 4)
+                                .band((row, column) -> row == 1 && column == 2 ? mark : 9)
+                                .bytes());
         assertThat(warnings(files)).contains("\"head\"", shown, "row 2, column 3", "a mark for \"no value\"");
     }
 
     @Test
     void doubtsMarksInOtherUnits() {
-        AquiferFiles files = files()
-                .with("sources", "[{'category': 'recharge', 'kind': 'areal', 'rate': {'file': 'r.csv'}}]")
+        AquiferFiles files = files().with(
+                        "sources", "[{'category': 'recharge', 'kind': 'areal', 'rate': {'file': 'r.csv'}}]")
                 .file("r.csv", "row,col,rate [mm/yr]\n1,1,200\n2,2,-9999\n");
         assertThat(warnings(files)).contains("\"recharge\"", "-9999", "mm/yr", "row 2, column 2", "a mark");
     }

@@ -42,7 +42,9 @@ class OutputFolderTest {
             for (Path file : files.toList()) {
                 contents.put(
                         file.getFileName().toString(),
-                        Files.isDirectory(file) ? "folder" : Files.readString(file, java.nio.charset.StandardCharsets.ISO_8859_1));
+                        Files.isDirectory(file)
+                                ? "folder"
+                                : Files.readString(file, java.nio.charset.StandardCharsets.ISO_8859_1));
             }
         }
         return contents;
@@ -53,7 +55,12 @@ class OutputFolderTest {
         AquiferFiles files = new AquiferFiles(folder).write();
         Path deep = folder.resolve("a/b/c");
         Ran ran = Ran.of(
-                "balance", files.aquifer().toString(), "--prisms", files.prisms().toString(), "--out", deep.toString());
+                "balance",
+                files.aquifer().toString(),
+                "--prisms",
+                files.prisms().toString(),
+                "--out",
+                deep.toString());
         succeeded(ran);
         assertThat(AquiferFiles.names(deep)).containsExactly(FILES);
         assertThat(AquiferFiles.names(deep.getParent())).containsExactly("c");
@@ -65,7 +72,12 @@ class OutputFolderTest {
         AquiferFiles files = new AquiferFiles(folder).with("grids", "1").write();
         Path deep = folder.resolve("a/b/c");
         Ran ran = Ran.of(
-                "balance", files.aquifer().toString(), "--prisms", files.prisms().toString(), "--out", deep.toString());
+                "balance",
+                files.aquifer().toString(),
+                "--prisms",
+                files.prisms().toString(),
+                "--out",
+                deep.toString());
         assertThat(ran.status()).isEqualTo(3);
         assertThat(files.left()).containsExactly("aquifer", "prisms.geojson");
     }
@@ -168,7 +180,10 @@ class OutputFolderTest {
         succeeded(files.balance());
         Map<String, String> before = contents(files.out());
         assertThat(files.with("grids", "1").balance("--overwrite").status()).isEqualTo(3);
-        assertThat(files.without("grids").balance("--overwrite", "--every", "month").status()).isEqualTo(3);
+        assertThat(files.without("grids")
+                        .balance("--overwrite", "--every", "month")
+                        .status())
+                .isEqualTo(3);
         assertThat(contents(files.out())).isEqualTo(before);
         assertThat(files.left()).containsExactly("aquifer", "out", "prisms.geojson");
     }
@@ -185,7 +200,8 @@ class OutputFolderTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"../mine.txt", "/etc/mine.txt", "..", ".", ".mine", "drawings", "drawings/x", "mine.txt\\u0000"})
+    @ValueSource(
+            strings = {"../mine.txt", "/etc/mine.txt", "..", ".", ".mine", "drawings", "drawings/x", "mine.txt\\u0000"})
     void takesNoNameOutOfTheFolderFromARunRecord(String hostile) throws IOException {
         AquiferFiles files = new AquiferFiles(folder);
         succeeded(files.balance());

@@ -25,8 +25,7 @@ import org.seepledger.io.raster.GeoTiff;
 class ResultFilesTest {
 
     /** An island in it, given the wrong way round, as its outer ring is. */
-    private static final String RINGED =
-            """
+    private static final String RINGED = """
             'type': 'MultiPolygon', 'coordinates': [
               [[[500001,1],[500001,29],[500029,29],[500029,1],[500001,1]],
                [[500010,10],[500020,10],[500020,20],[500010,20],[500010,10]]],
@@ -70,10 +69,9 @@ class ResultFilesTest {
         assertThat(faces.at("/crs/properties/name").asText()).isEqualTo("urn:ogc:def:crs:EPSG::32633");
         assertThat(faces.get("disclaimer").asText()).contains("not a determination of compliance");
         Budget budget = Budget.of(files.out());
-        assertThat(faces.get("features").size())
-                .isEqualTo((int) budget.rows().stream()
-                        .filter(row -> row.get("group").matches("side|lid"))
-                        .count());
+        assertThat(faces.get("features").size()).isEqualTo((int) budget.rows().stream()
+                .filter(row -> row.get("group").matches("side|lid"))
+                .count());
         for (JsonNode face : faces.get("features")) {
             JsonNode properties = face.get("properties");
             assertThat(face.get("type").asText()).isEqualTo("Feature");
@@ -132,8 +130,8 @@ class ResultFilesTest {
 
     private static Coordinate[] corners(JsonNode ring) {
         List<Coordinate> corners = new ArrayList<>();
-        ring.forEach(place -> corners.add(
-                new Coordinate(place.get(0).asDouble(), place.get(1).asDouble())));
+        ring.forEach(place ->
+                corners.add(new Coordinate(place.get(0).asDouble(), place.get(1).asDouble())));
         return corners.toArray(Coordinate[]::new);
     }
 
@@ -161,7 +159,10 @@ class ResultFilesTest {
                 .with("sources", "[{'category': 'recharge', 'kind': 'areal', 'rate': {'file': 'r.csv'}}]")
                 .file("r.csv", "interval,rate\n1,0.003\n2,0\n")
                 .prismsIn("EPSG:32633")
-                .prism("p", "", "'type': 'Polygon', 'coordinates': [[[500012,3],[500018,3],[500018,17],[500012,17],[500012,3]]]");
+                .prism(
+                        "p",
+                        "",
+                        "'type': 'Polygon', 'coordinates': [[[500012,3],[500018,3],[500018,17],[500012,17],[500012,3]]]");
         done(files);
         try (GeoTiff raster = GeoTiff.open(files.out().resolve("imbalance_l1.tif"), "imbalance_l1.tif")) {
             assertThat(raster.columns()).isEqualTo(1);
@@ -215,7 +216,8 @@ class ResultFilesTest {
         for (String stage : List.of("reading", "balancing", "writing")) {
             assertThat(run.at("/seconds/" + stage).doubleValue()).as(stage).isPositive();
         }
-        assertThat(run.at("/checks/largest_difference_between_routes").doubleValue()).isBetween(0.0, 1e-12);
+        assertThat(run.at("/checks/largest_difference_between_routes").doubleValue())
+                .isBetween(0.0, 1e-12);
         assertThat(run.get("disclaimer").asText()).isNotEmpty();
     }
 
