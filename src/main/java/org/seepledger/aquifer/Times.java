@@ -2,6 +2,7 @@ package org.seepledger.aquifer;
 
 import java.time.Duration;
 import java.time.LocalDateTime;
+import java.util.Arrays;
 import java.util.Optional;
 import org.seepledger.unit.Measure;
 
@@ -69,6 +70,17 @@ public final class Times {
      */
     public double length(int interval) {
         return instants[interval + 1] - instants[interval];
+    }
+
+    /**
+     * {@return the interval that holds a time; the first or last one outside the record}
+     *
+     * @param time in time units
+     */
+    public int intervalAt(double time) {
+        int found = Arrays.binarySearch(instants, time);
+        int interval = found >= 0 ? found : -found - 2;
+        return Math.max(0, Math.min(intervals() - 1, interval));
     }
 
     /**

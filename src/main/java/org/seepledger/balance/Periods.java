@@ -121,7 +121,7 @@ public final class Periods {
 
     private Period cut(String name, double from, double to) {
         List<Period.Part> parts = new ArrayList<>();
-        for (int i = 0; i < times.intervals(); i++) {
+        for (int i = times.intervalAt(from); i < times.intervals() && times.instant(i) < to; i++) {
             double overlap = Math.min(to, times.instant(i + 1)) - Math.max(from, times.instant(i));
             if (overlap > SLIVER * times.length(i)) {
                 parts.add(new Period.Part(i, overlap));

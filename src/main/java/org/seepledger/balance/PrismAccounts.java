@@ -67,6 +67,11 @@ final class PrismAccounts {
     /** Books what one band of rows holds of the prism in one interval. */
     void book(IntervalState state, Slab slab, Bookings bookings) {
         bookPieces(state, slab, bookings);
+        int[] termAccounts = state.terms().stream()
+                .mapToInt(term -> term.storage()
+                        ? chart.storage(term.item(), chart.first())
+                        : chart.source(term.item(), chart.first()))
+                .toArray();
         Window rows = state.geometry().inner();
         Coverage coverage = cut.coverage();
         int from = Math.max(rows.row(), coverage.window().row());
@@ -80,7 +85,7 @@ final class PrismAccounts {
                     if (slab.hasRisers()) {
                         bookRisers(state.flows(), slab, row, column, bookings);
                     }
-                    bookCells(state, slab, row, column, share, bookings);
+                    bookCells(state, slab, termAccounts, row, column, share, bookings);
                 }
             }
         }
@@ -170,7 +175,8 @@ final class PrismAccounts {
         return carried;
     }
 
-    private void bookCells(IntervalState state, Slab slab, int row, int column, double share, Bookings bookings) {
+    private void bookCells(
+            IntervalState state, Slab slab, int[] termAccounts, int row, int column, double share, Bookings bookings) {
         FaceFlows flows = state.flows();
         for (int layer = chart.first(); layer <= chart.last(); layer++) {
             int cell = flows.block().cell(layer, row, column);
@@ -180,10 +186,10 @@ final class PrismAccounts {
                 continue;
             }
             bookings.fromVolume(share * slab.outflow(layer, row, column), flows.gross(layer, row, column));
-            for (CellTerm term : state.terms()) {
-                int account = term.storage() ? chart.storage(term.item(), layer) : chart.source(term.item(), layer);
+            for (int i = 0; i < termAccounts.length; i++) {
+                CellTerm term = state.terms().get(i);
                 double counted = share * slab.counted(term.entry(), layer, row, column);
-                bookings.added(account, counted * term.rates()[cell]);
+                bookings.added(termAccounts[i] + layer - chart.first(), counted * term.rates()[cell]);
             }
         }
     }

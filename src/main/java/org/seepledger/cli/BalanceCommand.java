@@ -26,7 +26,8 @@ import picocli.CommandLine.Parameters;
             "    --prisms sample-aquifers/terrace/prisms.geojson --out budget \\",
             "    --rate-unit L/s --max-closure-error 1",
             "",
-            "Written to DIR: budget.csv (the table), faces.geojson (faces with their flow), imbalance_l1.tif"
+            "Written to DIR: budget.csv (the table), exchange.csv (what prisms give to each other),"
+                    + " faces.geojson (faces with their flow), imbalance_l1.tif"
                     + " and so on (what does not balance, by cell and layer), run.json (inputs, options, warnings).",
             "Exit status: 0 done; 1 a fault of the program; 2 the command line is wrong; 3 the data are wrong;",
             "4 done, but a closure error exceeds --max-closure-error."

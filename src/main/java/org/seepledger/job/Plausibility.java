@@ -20,11 +20,25 @@ final class Plausibility {
 
     private static final double THICK_METRES = 10_000;
 
-    /** The greatest of medium to coarse sand and gravel (Johnson 1967, USGS Water-Supply Paper 1662-D). */
-    private static final double MOST_SPECIFIC_YIELD = 0.35;
+    /** From clay to coarse sand, the least and the greatest found. */
+    private static final Published SPECIFIC_YIELD =
+            new Published(0, 0.35, "1", "Johnson 1967, USGS Water-Supply Paper 1662-D");
 
-    /** The greatest of plastic clay, per metre (Domenico 1972). */
-    private static final double MOST_SPECIFIC_STORAGE = 2e-2;
+    /** From jointed rock to plastic clay. */
+    private static final Published SPECIFIC_STORAGE = new Published(3.3e-6, 2e-2, "1/m", "Domenico 1972");
+
+    /** From unfractured rock to gravel (the bounds from memory). */
+    private static final Published CONDUCTIVITY = new Published(1e-13, 1, "m/s", "Freeze and Cherry 1979");
+
+    /**
+     * The widest range that a handbook gives.
+     *
+     * @param least the least value
+     * @param greatest the greatest value
+     * @param unit their unit
+     * @param source the handbook
+     */
+    private record Published(double least, double greatest, String unit, String source) {}
 
     private final List<String> doubts = new ArrayList<>();
 
@@ -44,7 +58,7 @@ final class Plausibility {
         }
         checkMark(range, unit, range.least(), range.leastAt());
         checkMark(range, unit, range.greatest(), range.greatestAt());
-        if (unit.isCompatible(Measure.of("m/d"))) {
+        if (unit.isCompatible(Measure.of("m/d")) && !range.name().contains("conductivity")) {
             checkFlux(range, unit);
         }
         if (range.name().startsWith("flow ") && range.least() == 0 && range.greatest() == 0) {
@@ -54,9 +68,25 @@ final class Plausibility {
             doubts.add("\"" + range.name() + "\" reaches " + shown(range) + ": check its unit.");
         }
         switch (range.name()) {
-            case "specific yield", "storativity" -> checkFraction(range);
-            case "specific storage" -> checkSpecificStorage(range, unit);
+            case "specific yield" -> checkAgainst(range, unit, SPECIFIC_YIELD);
+            case "specific storage" -> checkAgainst(range, unit, SPECIFIC_STORAGE);
+            case "flow conductivity", "flow conductivity_y", "flow vertical_conductivity" ->
+                checkAgainst(range, unit, CONDUCTIVITY);
+            case "storativity" -> checkFraction(range);
             default -> {}
+        }
+    }
+
+    private void checkAgainst(ValueRange range, Measure unit, Published published) {
+        double factor = unit.in(Measure.of(published.unit()));
+        boolean low = range.least() != 0 && range.least() * factor < published.least();
+        boolean high = range.greatest() * factor > published.greatest();
+        if (low || high) {
+            double value = low ? range.least() : range.greatest();
+            doubts.add("\"" + range.name() + "\" is " + Figures.shown(value) + " " + range.unit() + " at "
+                    + (low ? range.leastAt() : range.greatestAt()) + ": outside the widest published range, "
+                    + published.least() + " to " + published.greatest() + " " + published.unit() + " ("
+                    + published.source() + ").");
         }
     }
 
@@ -70,18 +100,6 @@ final class Plausibility {
         if (range.least() < 0 || range.greatest() > 1) {
             doubts.add("\"" + range.name() + "\" goes from " + Figures.shown(range.least()) + " to "
                     + Figures.shown(range.greatest()) + ": it is a fraction between 0 and 1.");
-        } else if (range.greatest() > MOST_SPECIFIC_YIELD) {
-            doubts.add("\"" + range.name() + "\" reaches " + Figures.shown(range.greatest()) + " at "
-                    + range.greatestAt() + ": more than " + MOST_SPECIFIC_YIELD + " is hardly ever found.");
-        }
-    }
-
-    private void checkSpecificStorage(ValueRange range, Measure unit) {
-        double greatest = range.greatest() * unit.in(Measure.of("1/m"));
-        if (range.least() < 0 || greatest > MOST_SPECIFIC_STORAGE) {
-            doubts.add("\"" + range.name() + "\" reaches " + shown(range)
-                    + ": it is hardly ever negative or more than " + MOST_SPECIFIC_STORAGE
-                    + " per metre; check its unit, and that it is not storativity.");
         }
     }
 

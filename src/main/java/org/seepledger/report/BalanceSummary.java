@@ -24,6 +24,9 @@ public final class BalanceSummary {
 
     private static final int TERMS_SHOWN = 6;
 
+    /** Below this a closure error is rounding and nothing else. */
+    private static final double ROUNDING_PERCENT = 1e-9;
+
     private final Aquifer aquifer;
     private final Balance balance;
     private final List<PrismBudget> budgets;
@@ -124,7 +127,9 @@ public final class BalanceSummary {
                     .append(".\n");
             return;
         }
-        text.append("  Closure error ").append(Figures.percent(totals.closureError()));
+        boolean closes = Math.abs(totals.closureError()) < ROUNDING_PERCENT;
+        text.append(closes ? "  Closes to rounding: closure error " : "  Closure error ");
+        text.append(Figures.percent(totals.closureError()));
         text.append(" of throughput (")
                 .append(Figures.percent(totals.netClosureError()))
                 .append(" of net flow): ");

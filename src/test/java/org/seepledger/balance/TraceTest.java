@@ -40,21 +40,21 @@ class TraceTest {
         assertThat(rows).isPositive();
     }
 
-    @Property(tries = 40)
+    @Property(tries = 25)
     void addsUpWhereFaceFlowsAreGiven(@ForAll long seed) {
         RandomCase random = new RandomCase(seed);
         Aquifer aquifer = random.aquifer(0.1, 0.2, 0);
         checkAllRows(aquifer, random.prism("a"), WellRule.POINT);
     }
 
-    @Property(tries = 40)
+    @Property(tries = 25)
     void addsUpWithWells(@ForAll long seed) {
         RandomCase random = new RandomCase(seed);
         Aquifer aquifer = random.aquifer(0, 0, 12);
         checkAllRows(aquifer, random.prism("a"), seed % 2 == 0 ? WellRule.POINT : WellRule.SPREAD);
     }
 
-    @Property(tries = 40)
+    @Property(tries = 25)
     void addsUpWhereFluxIsGiven(@ForAll long seed) {
         RandomCase random = new RandomCase(seed);
         DarcyFlux flux = new DarcyFlux(
@@ -66,7 +66,11 @@ class TraceTest {
         List<Source> sources = List.of(
                 new Source.Areal("recharge", GriddedValues.constant(0.25)),
                 new Source.Points("pumping", List.of(well(random))));
-        checkAllRows(random.aquifer(flux, random.stack(0), sources), random.prism("a"), WellRule.POINT);
+        try {
+            checkAllRows(random.aquifer(flux, random.stack(0), sources), random.prism("a"), WellRule.POINT);
+        } catch (DataFault unlucky) {
+            passOver(unlucky);
+        }
     }
 
     private static Well well(RandomCase random) {
@@ -85,19 +89,22 @@ class TraceTest {
                 .get(0);
     }
 
-    @Property(tries = 60)
+    @Property(tries = 25)
     void addsUpWithHeadsAndStorageBetweenElevations(@ForAll long seed) {
-        TransientCase transientCase;
-        Prism prism;
         try {
-            transientCase = new TransientCase(seed);
-            prism = transientCase.prism("a");
-            checkAllRows(transientCase.aquifer, prism, seed % 2 == 0 ? WellRule.POINT : WellRule.SPREAD);
+            TransientCase transientCase = new TransientCase(seed);
+            WellRule rule = seed % 2 == 0 ? WellRule.POINT : WellRule.SPREAD;
+            checkAllRows(transientCase.aquifer, transientCase.prism("a"), rule);
         } catch (DataFault unlucky) {
-            Assume.that(!unlucky.getMessage().contains("no layer lies")
-                    && !unlucky.getMessage().contains("no active cell"));
-            throw unlucky;
+            passOver(unlucky);
         }
+    }
+
+    /** Passes over a random case whose prism misses the grid, or whose well stands in an inactive cell. */
+    private static void passOver(DataFault unlucky) {
+        Assume.that(!unlucky.getMessage().contains("no layer lies")
+                && !unlucky.getMessage().contains("no active cell"));
+        throw unlucky;
     }
 
     private static void checkAllRows(Aquifer aquifer, Prism prism, WellRule rule) {
