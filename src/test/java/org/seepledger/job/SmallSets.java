@@ -143,9 +143,14 @@ final class SmallSets {
 
     private void raster(Grid grid, String name, double low, double high) throws IOException {
         Files.createDirectories(folder.resolve(name).getParent());
-        GeoTiffWriter.write(folder.resolve(name), grid, grid.window(), Optional.empty(), row -> random.doubles(COLUMNS)
-                .map(part -> low + (high - low) * part)
-                .toArray());
+        GeoTiffWriter.write(
+                folder.resolve(name),
+                grid,
+                grid.window(),
+                Optional.empty(),
+                row -> random.doubles(COLUMNS)
+                        .map(part -> low + (high - low) * part)
+                        .toArray());
     }
 
     /** A line for each cell, and each layer and interval that the header tells apart, with random values. */
@@ -160,8 +165,7 @@ final class SmallSets {
                     text.append(cell / COLUMNS + 1).append(',').append(cell % COLUMNS + 1);
                     text.append(header.contains("layer") ? "," + layer : "");
                     text.append(header.contains("interval") ? "," + interval : "");
-                    random.doubles(values)
-                            .forEach(part -> text.append(',').append(low + (high - low) * part));
+                    random.doubles(values).forEach(part -> text.append(',').append(low + (high - low) * part));
                     text.append('\n');
                 }
             }

@@ -155,8 +155,7 @@ class TraceJobTest {
 
     private static String cell(CSVRecord line, String column) {
         return line.toMap().entrySet().stream()
-                .filter(entry ->
-                        entry.getKey().equals(column) || entry.getKey().startsWith(column + " ["))
+                .filter(entry -> entry.getKey().equals(column) || entry.getKey().startsWith(column + " ["))
                 .findFirst()
                 .orElseThrow()
                 .getValue();

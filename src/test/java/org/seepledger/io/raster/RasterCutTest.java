@@ -31,7 +31,8 @@ class RasterCutTest {
 
     @ParameterizedTest
     @ValueSource(
-            strings = {"float64-tiles", "int16", "bands-pixel", "bands-band-tiles", "scaled", "scaled-nodata", "masked"})
+            strings = {"float64-tiles", "int16", "bands-pixel", "bands-band-tiles", "scaled", "scaled-nodata", "masked"
+            })
     void keepsWhatIsStored(String name) throws IOException {
         Path copy = folder.resolve("copy.tif");
         Surroundings cells = surroundings();
