@@ -7,6 +7,11 @@
  * difference beyond {@value org.seepledger.balance.WaterBalance#ROUTES_AGREE} of the gross flow through the faces of
  * the cells touched is a fault of the program, and no result is given out.
  *
+ * <p>A {@link org.seepledger.balance.Trace} goes the way back: a row is linear in the stored numbers, and ones are booked
+ * in their place, by the same code, to find their weights. Given face flows, flux and heads count while thicknesses,
+ * conductances, upstream cells and the signs of gross flows stand; source rates, supplied storage and storage
+ * coefficients likewise. A dry cell's head counts 0, and the elevation of its bottom stands in for it.
+ *
  * <p>Sums run in a fixed order that does not depend on the number of threads, and are compensated (Neumaier 1974).
  */
 package org.seepledger.balance;

@@ -20,7 +20,8 @@ import picocli.CommandLine.Parameters;
         footer = {
             "",
             "Example: what the sample's budget rests on.",
-            "  seepledger extract sample-aquifers/terrace --prisms sample-aquifers/terrace/prisms.geojson --out extract",
+            "  seepledger extract sample-aquifers/terrace \\",
+            "    --prisms sample-aquifers/terrace/prisms.geojson --out extract",
             "  seepledger balance extract --prisms extract/prisms.geojson --out budget",
             "",
             "The grid stays as it is, so that rows, columns and every digit do too; tables keep the lines of the cells"

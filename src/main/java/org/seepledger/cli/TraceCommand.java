@@ -23,15 +23,16 @@ import picocli.CommandLine.Parameters;
             "Give the options that the budget was struck with: they change what a row comes to.",
             "",
             "Example: which flux values make up the flow through one side of the sample's well field.",
-            "  seepledger trace sample-aquifers/terrace --prisms sample-aquifers/terrace/prisms.geojson"
-                    + " --row \"well field/interval 1/river side/1\" --out river-side.csv",
+            "  seepledger trace sample-aquifers/terrace \\",
+            "    --prisms sample-aquifers/terrace/prisms.geojson \\",
+            "    --row \"well field/interval 1/river side/1\" --out trace.csv",
             "",
             "ROW is PRISM/PERIOD/ITEM/LAYER with the words of budget.csv; LAYER is * for a total, as \"residual/*\". It is"
                     + " held against the rows that there are, not split, so slashes in names stand as they are. Where"
                     + " several groups have an item of that name, write PRISM/PERIOD/GROUP/ITEM/LAYER.",
             "FILE is a CSV: file, place (band or column, and cell), value as it stands there, weight.",
-            "Exit status: 0 done; 1 a fault of the program; 2 the command line is wrong (a row that there is not, too);",
-            "3 the data are wrong."
+            "Exit status: 0 done; 1 a fault of the program; 2 the command line is wrong, or names a row that there is"
+                    + " not; 3 the data are wrong."
         })
 final class TraceCommand implements Callable<Integer> {
 

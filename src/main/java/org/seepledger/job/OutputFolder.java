@@ -16,6 +16,7 @@ import java.util.stream.Stream;
 import org.seepledger.fault.DataFault;
 import org.seepledger.fault.UsageFault;
 import org.seepledger.io.Unreadable;
+import org.seepledger.io.result.FileRecord;
 import org.seepledger.io.result.RunJson;
 
 /**
@@ -110,15 +111,29 @@ final class OutputFolder implements AutoCloseable {
         names.add(RunJson.NAME);
         try {
             RunJson.outputs(record).stream()
-                    .filter(name -> isBelow(record.toAbsolutePath().getParent(), name))
-                    .filter(name -> !Files.isDirectory(record.resolveSibling(name)))
-                    .forEach(names::add);
+                    .filter(output -> isOurs(record.toAbsolutePath().getParent(), output))
+                    .forEach(output -> names.add(output.name()));
         } catch (DataFault e) {
             throw new UsageFault(
                     "The output folder holds no run record that can be read, so no earlier run's files can be told"
                             + " apart: " + e.getMessage() + " Name a new or empty folder.");
         }
         return names;
+    }
+
+    /** Whether an earlier run wrote a file; in a folder further below, only if it is what the run wrote. */
+    private static boolean isOurs(Path folder, FileRecord output) {
+        String name = output.name();
+        if (!isBelow(folder, name) || Files.isDirectory(folder.resolve(name))) {
+            return false;
+        }
+        try {
+            return !name.contains("/")
+                    || Files.notExists(folder.resolve(name))
+                    || FileRecord.of(name, folder.resolve(name)).equals(output);
+        } catch (IOException e) {
+            return false;
+        }
     }
 
     /** Whether a folder that stands at the target already is a link to elsewhere. */

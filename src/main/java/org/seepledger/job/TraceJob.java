@@ -81,7 +81,14 @@ public final class TraceJob {
         Trace.Sum sum;
         try (TraceCsv table = TraceCsv.open(out.path(), statement, notes(number, units))) {
             sum = Trace.of(
-                    aquifer, row.prism(), request.wells(), traced, row.period(), units.rateFactor(), table, progress);
+                    aquifer,
+                    row.prism(),
+                    request.wells(),
+                    traced,
+                    row.period(),
+                    units.rateFactor(),
+                    table::line,
+                    progress);
         }
         check(row, number, sum);
         out.publish();

@@ -40,21 +40,21 @@ class TraceTest {
         assertThat(rows).isPositive();
     }
 
-    @Property(tries = 25)
+    @Property(tries = 8)
     void addsUpWhereFaceFlowsAreGiven(@ForAll long seed) {
         RandomCase random = new RandomCase(seed);
         Aquifer aquifer = random.aquifer(0.1, 0.2, 0);
         checkAllRows(aquifer, random.prism("a"), WellRule.POINT);
     }
 
-    @Property(tries = 25)
+    @Property(tries = 8)
     void addsUpWithWells(@ForAll long seed) {
         RandomCase random = new RandomCase(seed);
         Aquifer aquifer = random.aquifer(0, 0, 12);
         checkAllRows(aquifer, random.prism("a"), seed % 2 == 0 ? WellRule.POINT : WellRule.SPREAD);
     }
 
-    @Property(tries = 25)
+    @Property(tries = 8)
     void addsUpWhereFluxIsGiven(@ForAll long seed) {
         RandomCase random = new RandomCase(seed);
         DarcyFlux flux = new DarcyFlux(
@@ -89,7 +89,7 @@ class TraceTest {
                 .get(0);
     }
 
-    @Property(tries = 25)
+    @Property(tries = 8)
     void addsUpWithHeadsAndStorageBetweenElevations(@ForAll long seed) {
         try {
             TransientCase transientCase = new TransientCase(seed);

@@ -5,6 +5,8 @@ import static org.assertj.core.api.Assertions.assertThat;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -31,7 +33,7 @@ class HelpTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"", "inspect", "balance"})
+    @ValueSource(strings = {"", "inspect", "balance", "trace", "extract"})
     void givesAnExampleThatWorks(String command) {
         Ran help = command.isEmpty() ? Ran.of("--help") : Ran.of(command, "--help");
         assertThat(help.status()).isZero();
@@ -44,19 +46,33 @@ class HelpTest {
                 .toList();
         assertThat(examples).isNotEmpty();
         for (String example : examples) {
-            List<String> arguments = new ArrayList<>(List.of(example.split(" ")));
+            List<String> arguments = words(example);
             arguments.remove(0);
-            arguments.replaceAll(
-                    word -> word.equals("budget") ? folder.resolve("out").toString() : word);
+            int out = arguments.indexOf("--out") + 1;
+            if (out > 0) {
+                arguments.set(out, folder.resolve("out").toString());
+            }
             Ran ran = Ran.of(arguments.toArray(String[]::new));
             assertThat(ran.err()).as(example).isEmpty();
             assertThat(ran.status()).as(example).isZero();
         }
     }
 
+    /** As a shell would split them. */
+    private static List<String> words(String line) {
+        List<String> words = new ArrayList<>();
+        Matcher word = Pattern.compile("\"([^\"]*)\"|\\S+").matcher(line);
+        while (word.find()) {
+            words.add(word.group(1) == null ? word.group() : word.group(1));
+        }
+        return words;
+    }
+
     @Test
     void fitsTheTerminal() {
-        for (String[] command : new String[][] {{"--help"}, {"inspect", "--help"}, {"balance", "--help"}}) {
+        for (String[] command : new String[][] {
+            {"--help"}, {"inspect", "--help"}, {"balance", "--help"}, {"trace", "--help"}, {"extract", "--help"}
+        }) {
             assertThat(Ran.of(command).out().lines()).allMatch(line -> line.length() <= 100);
         }
     }

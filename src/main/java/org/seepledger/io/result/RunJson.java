@@ -71,12 +71,12 @@ public final class RunJson {
     }
 
     /**
-     * {@return the names of the result files that a run's record lists, as they stand there, whatever they are}
+     * {@return the result files that a run's record lists, as they stand there, whatever they are}
      *
      * @param file the record
      * @throws DataFault if it cannot be read or is not the record of a run of this program
      */
-    public static List<String> outputs(Path file) {
+    public static List<FileRecord> outputs(Path file) {
         JsonNode root = JsonFile.read(file, file.toString());
         if (!root.path("program").asText().equals(PROGRAM)) {
             throw new DataFault(
@@ -86,9 +86,13 @@ public final class RunJson {
                     "the record of an earlier run",
                     "It was written by something else.");
         }
-        List<String> names = new ArrayList<>();
-        root.path(OUTPUTS).forEach(output -> names.add(output.path("name").asText()));
-        return names;
+        List<FileRecord> outputs = new ArrayList<>();
+        root.path(OUTPUTS)
+                .forEach(output -> outputs.add(new FileRecord(
+                        output.path("name").asText(),
+                        output.path("bytes").asLong(),
+                        output.path("sha256").asText())));
+        return outputs;
     }
 
     private static void addFiles(ArrayNode array, List<FileRecord> files) {

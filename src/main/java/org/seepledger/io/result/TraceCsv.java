@@ -8,11 +8,10 @@ import java.nio.file.Path;
 import java.util.List;
 import org.apache.commons.csv.CSVFormat;
 import org.apache.commons.csv.CSVPrinter;
-import org.seepledger.balance.Trace;
 import org.seepledger.io.table.CsvText;
 
 /** Writes a trace: notes, a header {@code file,place,value,weight}, a line for each stored number. */
-public final class TraceCsv implements Trace.Lines, AutoCloseable {
+public final class TraceCsv implements AutoCloseable {
 
     /** How the title of every trace begins. */
     public static final String TITLE = "Trace of ";
@@ -45,7 +44,14 @@ public final class TraceCsv implements Trace.Lines, AutoCloseable {
         return new TraceCsv(printer);
     }
 
-    @Override
+    /**
+     * Writes a line.
+     *
+     * @param file the file that a number stands in
+     * @param place where in the file
+     * @param value the number
+     * @param weight what it counts
+     */
     public void line(String file, String place, double value, double weight) {
         try {
             rows.printRecord(CsvText.text(file), CsvText.text(place), CsvText.number(value), CsvText.number(weight));

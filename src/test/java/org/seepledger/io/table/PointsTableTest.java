@@ -15,6 +15,7 @@ import org.seepledger.aquifer.Axis;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.PointRate;
 import org.seepledger.aquifer.Screen;
+import org.seepledger.aquifer.Stored;
 import org.seepledger.aquifer.Times;
 import org.seepledger.unit.Measure;
 
@@ -32,6 +33,18 @@ class PointsTableTest {
         Path file = Tables.file(folder, text.replace('@', '\n'));
         return PointsTable.read(
                 file, "in/w.csv", "pumping", frame, Tables.METRE, Tables.CUBIC_METRE_A_DAY, warnings::add);
+    }
+
+    @Test
+    void keepsTheNumberThatARateFollowsFrom() {
+        String text = "name,x,y,layer,from,to,rate [L/s],volume [L]@A,105,230,1,,,-1.5,@B,105,230,1,2,6,,-4000@";
+        List<PointRate> points = read(text, DATED);
+        assertThat(points.get(0).given())
+                .usingRecursiveComparison()
+                .isEqualTo(Stored.number("in/w.csv", "line 2, column rate", -1.5, 86.4));
+        assertThat(points.get(1).given())
+                .usingRecursiveComparison()
+                .isEqualTo(Stored.number("in/w.csv", "line 3, column volume", -4000, 0.001 / 4));
     }
 
     @Test
