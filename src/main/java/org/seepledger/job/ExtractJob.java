@@ -113,14 +113,14 @@ public final class ExtractJob {
         RunJson.write(out.file(RunJson.NAME), run, outputs);
     }
 
-    private String summary(Surroundings cells, String prisms, List<String> files) {
+    private String summary(Surroundings cells, String prisms, int files) {
         Grid grid = subject.aquifer().grid();
         StringBuilder text = new StringBuilder();
         text.append("Kept ").append(cells.count()).append(" of ");
         text.append((long) grid.rows() * grid.columns()).append(" columns of cells; the others have no value.\n");
         subject.notes().forEach(note -> text.append("Note: ").append(note).append('\n'));
         text.append("Written to ").append(request.out()).append(": ");
-        text.append(String.join(", ", files)).append('\n');
+        text.append(files).append(" files, all named in run.json.\n");
         text.append("Strike its budget with: seepledger balance ").append(request.out());
         text.append(" --prisms ").append(request.out().resolve(prisms)).append(" --out DIR\n");
         return text.toString();
