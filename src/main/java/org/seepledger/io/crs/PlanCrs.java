@@ -20,7 +20,10 @@ public final class PlanCrs {
 
     private static final PlanCrs LOCAL = new PlanCrs(Optional.empty(), Optional.empty(), Double.NaN);
 
-    /** What the libraries have to say is not for users. Kept, since the logging framework forgets the level of a logger that nobody holds. */
+    /**
+     * What the libraries have to say is not for users. Kept, since the logging framework forgets the level of a logger
+     * that nobody holds.
+     */
     private static final Logger[] QUIET = {
         quiet("java.util.prefs", Level.OFF), quiet("org.geotools", Level.SEVERE),
     };
