@@ -81,16 +81,7 @@ public final class GridEdge {
      */
     public Prism clip(Prism prism) {
         List<Ring> kept = new ArrayList<>();
-        List<Ring> rings = prism.rings();
-        int begin = 0;
-        while (begin < rings.size()) {
-            int end = begin + 1;
-            while (end < rings.size() && rings.get(end).island() > 0) {
-                end++;
-            }
-            kept.addAll(clipPart(rings.subList(begin, end)));
-            begin = end;
-        }
+        prism.parts().forEach(part -> kept.addAll(clipPart(part)));
         return new Prism(prism.name(), kept, prism.range());
     }
 
