@@ -74,7 +74,7 @@ public final class BalanceJob {
         Period whole = new Periods(aquifer.times()).record();
         List<PeriodBudget> records =
                 balance.ledgers().stream().map(ledger -> ledger.budget(whole)).toList();
-        RunWarnings words = RunWarnings.of(aquifer, balance);
+        RunWarnings words = new RunWarnings(aquifer, balance.notes());
         warnings.addAll(words.warnings(records));
         subject.notes().addAll(words.remarks(request.wells()));
         List<PrismBudget> budgets = balance.ledgers().stream()
