@@ -16,6 +16,7 @@ import java.util.stream.Stream;
 import org.seepledger.fault.DataFault;
 import org.seepledger.fault.UsageFault;
 import org.seepledger.io.Unreadable;
+import org.seepledger.io.result.FileRecord;
 import org.seepledger.io.result.RunJson;
 
 /**
@@ -178,6 +179,15 @@ final class OutputFolder implements AutoCloseable {
     /** The names of the files written so far. */
     List<String> written() {
         return names(aside);
+    }
+
+    /** The files written so far, with their fingerprints. */
+    List<FileRecord> records() throws IOException {
+        List<FileRecord> records = new ArrayList<>();
+        for (String name : written()) {
+            records.add(FileRecord.of(name, file(name)));
+        }
+        return records;
     }
 
     /**

@@ -72,12 +72,8 @@ public final class TraceJob {
                 .get(0);
         TracedRow traced = traced(row, ledger);
         Number number = number(row, ledger.budget(row.period()), units);
-        Statement statement = new Statement(
-                TraceCsv.TITLE + "\"" + row.shortName() + "\" in \"" + aquifer.name() + "\" by seepledger "
-                        + Version.text(),
-                subject.inputs(progress),
-                subject.folder().origins(),
-                subject.warnings());
+        String title = TraceCsv.TITLE + "\"" + row.shortName() + "\" in \"" + aquifer.name() + "\"";
+        Statement statement = subject.statement(title, progress);
         Trace.Sum sum;
         try (TraceCsv table = TraceCsv.open(out.path(), statement, notes(number, units))) {
             sum = Trace.of(
