@@ -104,6 +104,17 @@ public final class Axis {
     }
 
     /**
+     * {@return the size of the smallest cell, in plan units}
+     */
+    public double smallest() {
+        double smallest = size(0);
+        for (int cell = 1; cell < count(); cell++) {
+            smallest = Math.min(smallest, size(cell));
+        }
+        return smallest;
+    }
+
+    /**
      * {@return the cell that holds a distance from the first edge: the last one whose first edge is not beyond it, or
      * -1 or {@link #count()} outside}
      *

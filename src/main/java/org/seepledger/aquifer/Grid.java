@@ -1,7 +1,5 @@
 package org.seepledger.aquifer;
 
-import java.util.List;
-
 /**
  * The grid in plan: columns along x, rows along y, turned counter-clockwise about the corner (first x edge, first y
  * edge).
@@ -158,12 +156,7 @@ public record Grid(Axis x, Axis y, double rotation, double planUnit, double near
     }
 
     private static double nearness(Axis x, Axis y) {
-        double size = Double.POSITIVE_INFINITY;
-        for (Axis axis : List.of(x, y)) {
-            for (int cell = 0; cell < axis.count(); cell++) {
-                size = Math.min(size, axis.size(cell));
-            }
-        }
+        double size = Math.min(x.smallest(), y.smallest());
         double reach = x.edge(x.count()) + y.edge(y.count());
         double farthest = Math.max(Math.abs(x.origin()), Math.abs(y.origin())) + reach;
         return Math.max(Axis.SNAP, ROUNDING * Math.ulp(farthest) / size);

@@ -51,12 +51,8 @@ public final class Saturation {
         return active;
     }
 
-    /**
-     * {@return whether the water table can lie in a cell}
-     *
-     * @param cell its place in the block
-     */
-    public boolean isWaterTable(int cell) {
+    /** Whether the water table can lie in a cell. */
+    boolean isWaterTable(int cell) {
         return layers.get(cell / geometry.block().window().size()).waterTable();
     }
 

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import org.seepledger.aquifer.CellTerm;
 import org.seepledger.aquifer.FaceMismatch;
 import org.seepledger.aquifer.IntervalState;
@@ -14,7 +15,7 @@ final class BandResult {
     private final List<List<Tally>> tallies = new ArrayList<>();
     private final List<List<Tally>> exchanged = new ArrayList<>();
     private final List<Map<String, Uncounted>> uncounted = new ArrayList<>();
-    private FaceMismatch mismatch;
+    private Optional<FaceMismatch> mismatch = Optional.empty();
 
     BandResult(List<PrismAccounts> prisms, List<Contact> contacts, int intervals) {
         for (int interval = 0; interval < intervals; interval++) {
@@ -40,8 +41,8 @@ final class BandResult {
     }
 
     private void note(FaceMismatch found) {
-        if (mismatch == null || found.difference() > mismatch.difference()) {
-            mismatch = found;
+        if (mismatch.isEmpty() || found.difference() > mismatch.get().difference()) {
+            mismatch = Optional.of(found);
         }
     }
 
@@ -56,13 +57,11 @@ final class BandResult {
             Map<String, Uncounted> own = uncounted.get(interval);
             other.uncounted.get(interval).forEach((item, more) -> own.merge(item, more, Uncounted::plus));
         }
-        if (other.mismatch != null) {
-            note(other.mismatch);
-        }
+        other.mismatch.ifPresent(this::note);
     }
 
-    /** The greatest difference between two given values of one face; null if there is none. */
-    FaceMismatch mismatch() {
+    /** The greatest difference between two given values of one face, if any differ. */
+    Optional<FaceMismatch> mismatch() {
         return mismatch;
     }
 

@@ -98,14 +98,7 @@ public record RunNotes(
             }
             accounts.wells().forEach((well, cut) -> addCutWell(wells, name, well, cut));
         }
-        return new RunNotes(
-                overlaps,
-                inactive,
-                closed,
-                wells,
-                total.uncounted(),
-                Optional.ofNullable(total.mismatch()),
-                disagreement);
+        return new RunNotes(overlaps, inactive, closed, wells, total.uncounted(), total.mismatch(), disagreement);
     }
 
     private static void addClosedSides(List<ClosedSide> closed, String prism, PrismCut cut) {

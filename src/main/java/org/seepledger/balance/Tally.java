@@ -3,8 +3,8 @@ package org.seepledger.balance;
 import org.seepledger.fault.ProgramFault;
 
 /**
- * The running sums of one prism in one interval: gross rates by account, both routes to its net outflow, and the area of
- * its cells that take no part.
+ * The running sums of one prism, or of one contact of two, in one interval: gross rates by account, both routes to a
+ * prism's net outflow, and the area of its cells that take no part.
  */
 final class Tally implements Bookings {
 

@@ -5,6 +5,7 @@ import java.util.Optional;
 import java.util.function.Predicate;
 import org.seepledger.ledger.Account;
 import org.seepledger.ledger.Group;
+import org.seepledger.ledger.Total;
 
 /**
  * A row of a budget as a sum over accounts: so many times the gross inflow of each and so many times its gross outflow.
@@ -33,21 +34,21 @@ public final class TracedRow {
     }
 
     /**
-     * {@return a total, as {@code inflow}; empty where there is none of that name, or it is no sum over accounts}
+     * {@return a total; empty where it is no sum over accounts}
      *
-     * @param name its item in the budget
+     * @param total the total
      * @param accounts the accounts of a prism
      */
-    public static Optional<TracedRow> total(String name, List<Account> accounts) {
+    public static Optional<TracedRow> of(Total total, List<Account> accounts) {
         TracedRow row = new TracedRow(accounts.size());
         Predicate<Account> storage = account -> account.group() == Group.STORAGE;
-        switch (name) {
-            case "inflow" -> row.add(accounts, storage.negate(), 1, 0);
-            case "outflow" -> row.add(accounts, storage.negate(), 0, 1);
-            case "storage change" -> row.add(accounts, storage, -1, 1);
-            case "residual" -> row.add(accounts, account -> true, 1, -1);
-            case "unexplained, storage included" -> row.add(accounts, storage.negate(), 1, -1);
-            default -> {
+        switch (total) {
+            case INFLOW -> row.add(accounts, storage.negate(), 1, 0);
+            case OUTFLOW -> row.add(accounts, storage.negate(), 0, 1);
+            case STORAGE_CHANGE -> row.add(accounts, storage, -1, 1);
+            case RESIDUAL -> row.add(accounts, account -> true, 1, -1);
+            case UNEXPLAINED -> row.add(accounts, storage.negate(), 1, -1);
+            case CLOSURE_ERROR, NET_CLOSURE_ERROR -> {
                 return Optional.empty();
             }
         }

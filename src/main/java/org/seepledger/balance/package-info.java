@@ -1,5 +1,6 @@
 /**
- * The balance: an aquifer and cut prisms become ledgers.
+ * The balance: an aquifer and cut prisms become ledgers, with what the prisms give to each other and what does not
+ * balance, cell by cell; and the way back, from a row of a ledger to the stored numbers that it rests on.
  *
  * <p>The work is done by interval and band of rows, within the prisms' joint window. Outflow through a prism's faces is
  * worked out twice, by different routes: piece by piece along its boundary, and as the integral of the cells' own gains

@@ -1,7 +1,6 @@
 package org.seepledger.job;
 
 import java.io.IOException;
-import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
@@ -74,17 +73,13 @@ public final class BalanceJob {
         Period whole = new Periods(aquifer.times()).record();
         List<PeriodBudget> records =
                 balance.ledgers().stream().map(ledger -> ledger.budget(whole)).toList();
-        RunWarnings words = RunWarnings.of(aquifer, balance);
+        RunWarnings words = new RunWarnings(aquifer, balance.notes());
         warnings.addAll(words.warnings(records));
         subject.notes().addAll(words.remarks(request.wells()));
         List<PrismBudget> budgets = balance.ledgers().stream()
                 .map(ledger -> budget(ledger, periods))
                 .toList();
-        Statement statement = new Statement(
-                "Water budget of \"" + aquifer.name() + "\" by seepledger " + Version.text(),
-                subject.inputs(progress),
-                subject.folder().origins(),
-                warnings);
+        Statement statement = subject.statement("Water budget of \"" + aquifer.name() + "\"", progress);
         try {
             BudgetCsv.write(out.file("budget.csv"), statement, budgets, aquifer.times(), units);
             ExchangeCsv.write(out.file("exchange.csv"), statement, balance.exchange(), periods, aquifer.times(), units);
@@ -119,10 +114,7 @@ public final class BalanceJob {
     }
 
     private void writeRecord(OutputFolder out, Statement statement, Balance balance) throws IOException {
-        List<FileRecord> outputs = new ArrayList<>();
-        for (String name : out.written()) {
-            outputs.add(FileRecord.of(name, out.file(name)));
-        }
+        List<FileRecord> outputs = out.records();
         stopwatch.lap("writing");
         Map<String, Double> checks =
                 Map.of("largest_difference_between_routes", balance.notes().disagreement());

@@ -3,6 +3,7 @@ package org.seepledger.job;
 import java.util.ArrayList;
 import java.util.Collection;
 import java.util.List;
+import java.util.Optional;
 import java.util.function.Function;
 import java.util.stream.Stream;
 import org.seepledger.aquifer.Aquifer;
@@ -14,6 +15,7 @@ import org.seepledger.io.table.CsvText;
 import org.seepledger.ledger.Account;
 import org.seepledger.ledger.Group;
 import org.seepledger.ledger.Period;
+import org.seepledger.ledger.Total;
 import org.seepledger.prism.Prism;
 
 /**
@@ -30,9 +32,6 @@ import org.seepledger.prism.Prism;
 record BudgetRow(Prism prism, Period period, Item item, int account) {
 
     private static final String FORM = "Name it as PRISM/PERIOD/ITEM/LAYER, with the words of budget.csv.";
-    private static final List<String> TOTALS =
-            List.of("inflow", "outflow", "storage change", "residual", "closure error", "net closure error");
-    private static final String UNEXPLAINED = "unexplained, storage included";
 
     /**
      * What a row is called within its prism and period.
@@ -40,8 +39,18 @@ record BudgetRow(Prism prism, Period period, Item item, int account) {
      * @param group its group
      * @param name the item
      * @param layer the layer, or {@code *}
+     * @param total the total that it is; empty where it is an account
      */
-    record Item(Group group, String name, String layer) {
+    record Item(Group group, String name, String layer, Optional<Total> total) {
+
+        static Item of(Account account) {
+            String layer = String.valueOf(account.layer() + 1);
+            return new Item(account.group(), account.item(), layer, Optional.empty());
+        }
+
+        static Item of(Total total) {
+            return new Item(Group.TOTAL, total.toString(), "*", Optional.of(total));
+        }
 
         String shortName() {
             return name + "/" + layer;
@@ -76,7 +85,7 @@ record BudgetRow(Prism prism, Period period, Item item, int account) {
                 fault = none(name, "period", head(prism.text()), names);
             }
             List<Account> accounts = Trace.accounts(aquifer, prism.named());
-            List<Item> items = items(accounts, aquifer.storageKnowledge());
+            List<Item> items = items(accounts, aquifer.storageKnowledge() != StorageKnowledge.UNKNOWN);
             for (Rest<Period> period : ofPeriod) {
                 List<Integer> matching = matching(period.text(), items);
                 matching.forEach(i -> found.add(
@@ -111,13 +120,9 @@ record BudgetRow(Prism prism, Period period, Item item, int account) {
     }
 
     /** All rows of a period: the accounts, then the totals. */
-    private static List<Item> items(List<Account> accounts, StorageKnowledge storage) {
-        Stream<Item> own = accounts.stream()
-                .map(account -> new Item(account.group(), account.item(), String.valueOf(account.layer() + 1)));
-        Stream<String> unexplained = Stream.of(UNEXPLAINED).filter(name -> storage == StorageKnowledge.UNKNOWN);
-        Stream<Item> totals =
-                Stream.concat(TOTALS.stream(), unexplained).map(total -> new Item(Group.TOTAL, total, "*"));
-        return Stream.concat(own, totals).toList();
+    private static List<Item> items(List<Account> accounts, boolean storageKnown) {
+        Stream<Item> totals = Total.rows(storageKnown).stream().map(Item::of);
+        return Stream.concat(accounts.stream().map(Item::of), totals).toList();
     }
 
     private static List<Integer> matching(String text, List<Item> items) {

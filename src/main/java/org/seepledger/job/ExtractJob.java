@@ -3,7 +3,6 @@ package org.seepledger.job;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -94,15 +93,9 @@ public final class ExtractJob {
     }
 
     private void writeRecord(OutputFolder out) throws IOException {
-        Statement statement = new Statement(
-                "Extract of \"" + subject.aquifer().name() + "\" by seepledger " + Version.text(),
-                subject.inputs(progress),
-                subject.folder().origins(),
-                subject.warnings());
-        List<FileRecord> outputs = new ArrayList<>();
-        for (String name : out.written()) {
-            outputs.add(FileRecord.of(name, out.file(name)));
-        }
+        String title = "Extract of \"" + subject.aquifer().name() + "\"";
+        Statement statement = subject.statement(title, progress);
+        List<FileRecord> outputs = out.records();
         stopwatch.lap("writing");
         Map<String, String> options = new LinkedHashMap<>();
         options.put("aquifer", request.aquifer().toString());

@@ -43,12 +43,10 @@ public final class InspectJob {
             Prism whole = whole(aquifer);
             Balance balance = WaterBalance.of(aquifer, List.of(whole), WellRule.POINT, threads, progress);
             PeriodBudget record = balance.ledgers().get(0).budget(new Periods(aquifer.times()).record());
-            RunWarnings words = RunWarnings.of(aquifer, balance);
+            RunWarnings words = new RunWarnings(aquifer, balance.notes());
             List<String> warnings = new ArrayList<>(opened.warnings());
             warnings.addAll(Plausibility.doubts(ranges));
-            words.warnings(List.of(record)).stream()
-                    .filter(warning -> !warning.contains(WHOLE))
-                    .forEach(warnings::add);
+            warnings.addAll(words.warningsOfSet(List.of(record)));
             List<String> notes = new ArrayList<>(opened.notes());
             notes.addAll(words.remarks(WellRule.POINT));
             return new InspectionText(opened, ranges, balance, record).write(warnings, notes);

@@ -195,6 +195,15 @@ final class OutputFolder implements AutoCloseable {
         return names(aside);
     }
 
+    /** The files written so far, with their fingerprints. */
+    List<FileRecord> records() throws IOException {
+        List<FileRecord> records = new ArrayList<>();
+        for (String name : written()) {
+            records.add(FileRecord.of(name, file(name)));
+        }
+        return records;
+    }
+
     /**
      * Moves the files into place, the run record last, and removes those of an earlier run that have no successor.
      *

@@ -8,7 +8,6 @@ import java.util.regex.Pattern;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.FaceMismatch;
 import org.seepledger.aquifer.StorageKnowledge;
-import org.seepledger.balance.Balance;
 import org.seepledger.balance.RunNotes;
 import org.seepledger.balance.Uncounted;
 import org.seepledger.balance.WellRule;
@@ -28,29 +27,59 @@ final class RunWarnings {
     private final Aquifer aquifer;
     private final RunNotes notes;
 
+    /**
+     * Prepares what there is to say of a balance.
+     *
+     * @param aquifer the aquifer
+     * @param notes what its balance noted
+     */
     RunWarnings(Aquifer aquifer, RunNotes notes) {
         this.aquifer = aquifer;
         this.notes = notes;
     }
 
-    /** What may make a number wrong or missing. */
+    /** What may make a number of the prisms' budgets wrong or missing. */
     List<String> warnings(List<PeriodBudget> records) {
+        List<String> warnings = ofStorage();
+        warnings.addAll(ofPrisms());
+        warnings.addAll(ofData(records));
+        return warnings.stream().distinct().toList();
+    }
+
+    /** What may make a number wrong or missing wherever prisms are drawn; the records are of the whole grid. */
+    List<String> warningsOfSet(List<PeriodBudget> records) {
+        List<String> warnings = ofStorage();
+        warnings.addAll(ofData(records));
+        return warnings.stream().distinct().toList();
+    }
+
+    private List<String> ofStorage() {
         List<String> warnings = new ArrayList<>();
         if (aquifer.storageKnowledge() == StorageKnowledge.UNKNOWN) {
             warnings.add(
                     "Change in storage is not known (heads or storage coefficients are missing): storage, residual and"
                             + " closure errors are left empty.");
         }
+        return warnings;
+    }
+
+    private List<String> ofPrisms() {
+        List<String> warnings = new ArrayList<>();
         for (Overlap overlap : notes.overlaps()) {
             warnings.add("\"" + overlap.first() + "\" and \"" + overlap.second() + "\" overlap over "
                     + Figures.shown(overlap.area()) + " " + aquifer.lengthUnit()
                     + "2: what lies in both counts in both, and their exchange is left empty.");
         }
         notes.closedSides().forEach(side -> warnings.add(closed(side)));
+        return warnings;
+    }
+
+    private List<String> ofData(List<PeriodBudget> records) {
+        List<String> warnings = new ArrayList<>();
         notes.mismatch().ifPresent(mismatch -> warnings.add(differing(mismatch)));
         notes.uncounted().forEach((item, uncounted) -> addLost(warnings, item, uncounted));
         records.forEach(record -> addSigns(warnings, record));
-        return warnings.stream().distinct().toList();
+        return warnings;
     }
 
     private static String closed(RunNotes.ClosedSide side) {
@@ -115,11 +144,6 @@ final class RunWarnings {
             }
         }
         return remarks;
-    }
-
-    /** Doubts that a balance's whole record gives rise to. */
-    static RunWarnings of(Aquifer aquifer, Balance balance) {
-        return new RunWarnings(aquifer, balance.notes());
     }
 
     private String rate(double value) {

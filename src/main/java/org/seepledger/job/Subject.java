@@ -16,6 +16,7 @@ import org.seepledger.io.prisms.PrismsReader;
 import org.seepledger.io.prisms.SurfaceRasters;
 import org.seepledger.io.result.FileRecord;
 import org.seepledger.io.result.ResultUnits;
+import org.seepledger.io.result.Statement;
 import org.seepledger.io.table.PeriodsTable;
 import org.seepledger.ledger.Period;
 import org.seepledger.prism.Prism;
@@ -121,8 +122,14 @@ final class Subject implements AutoCloseable {
                 : folder.crs().code().or(() -> Optional.of(folder.crs().wkt()));
     }
 
+    /** What a result says of itself: its title, and the files, origins and warnings known by now. */
+    Statement statement(String title, Progress progress) {
+        String made = title + " by seepledger " + Version.text();
+        return new Statement(made, inputs(progress), folder.origins(), warnings);
+    }
+
     /** All files read, with their fingerprints; a file of the request may have the name of one of the set's. */
-    List<FileRecord> inputs(Progress progress) {
+    private List<FileRecord> inputs(Progress progress) {
         List<Map.Entry<String, Path>> files = new ArrayList<>(folder.inputs().entrySet());
         files.add(Map.entry(prismsFile.toString(), prismsFile));
         files.addAll(surfaces.inputs().entrySet());

@@ -15,7 +15,7 @@ import org.seepledger.io.result.TraceCsv;
 import org.seepledger.ledger.Entry;
 import org.seepledger.ledger.Ledger;
 import org.seepledger.ledger.PeriodBudget;
-import org.seepledger.ledger.Totals;
+import org.seepledger.ledger.Total;
 import org.seepledger.progress.Progress;
 
 /** Where a number of a budget comes from: the stored values that it rests on, each with its weight. */
@@ -72,12 +72,8 @@ public final class TraceJob {
                 .get(0);
         TracedRow traced = traced(row, ledger);
         Number number = number(row, ledger.budget(row.period()), units);
-        Statement statement = new Statement(
-                TraceCsv.TITLE + "\"" + row.shortName() + "\" in \"" + aquifer.name() + "\" by seepledger "
-                        + Version.text(),
-                subject.inputs(progress),
-                subject.folder().origins(),
-                subject.warnings());
+        String title = TraceCsv.TITLE + "\"" + row.shortName() + "\" in \"" + aquifer.name() + "\"";
+        Statement statement = subject.statement(title, progress);
         Trace.Sum sum;
         try (TraceCsv table = TraceCsv.open(out.path(), statement, notes(number, units))) {
             sum = Trace.of(
@@ -96,11 +92,11 @@ public final class TraceJob {
     }
 
     private static TracedRow traced(BudgetRow row, Ledger ledger) {
-        if (row.account() >= 0) {
+        Optional<Total> total = row.item().total();
+        if (total.isEmpty()) {
             return TracedRow.of(row.account(), ledger.accounts());
         }
-        String name = row.item().name();
-        return TracedRow.total(name, ledger.accounts())
+        return TracedRow.of(total.get(), ledger.accounts())
                 .orElseThrow(
                         () -> new UsageFault(
                                 "\"" + row.shortName()
@@ -109,22 +105,16 @@ public final class TraceJob {
 
     private static Number number(BudgetRow row, PeriodBudget budget, ResultUnits units) {
         double perVolume = units.rateFactor() / row.period().duration();
+        Optional<Total> total = row.item().total();
         double net;
         double gross;
-        if (row.account() >= 0) {
+        if (total.isEmpty()) {
             Entry entry = budget.entries().get(row.account());
             net = entry.net();
             gross = entry.inflow() + entry.outflow();
         } else {
-            Totals totals = budget.totals();
-            gross = totals.throughput();
-            net = switch (row.item().name()) {
-                case "inflow" -> totals.inflow();
-                case "outflow" -> totals.outflow();
-                case "storage change" -> totals.storageChange();
-                case "residual" -> totals.residual();
-                default -> totals.inflow() - totals.outflow();
-            };
+            net = budget.totals().get(total.get());
+            gross = budget.totals().throughput();
         }
         if (Double.isNaN(net)) {
             throw new UsageFault("\"" + row.shortName()

@@ -48,6 +48,23 @@ public record Totals(
     }
 
     /**
+     * {@return one of them: length³, or percent; NaN where it cannot be given}
+     *
+     * @param total which
+     */
+    public double get(Total total) {
+        return switch (total) {
+            case INFLOW -> inflow;
+            case OUTFLOW -> outflow;
+            case STORAGE_CHANGE -> storageChange;
+            case RESIDUAL -> residual;
+            case UNEXPLAINED -> inflow - outflow;
+            case CLOSURE_ERROR -> closureError();
+            case NET_CLOSURE_ERROR -> netClosureError();
+        };
+    }
+
+    /**
      * {@return 100 × residual ÷ throughput; NaN where storage is unknown or nothing flows}
      */
     public double closureError() {

@@ -1,5 +1,5 @@
 /**
- * The result as data: accounts, gross rates, periods, totals.
+ * The result as data: accounts, gross rates, periods, totals, and what prisms give to each other.
  *
  * <p>Sign conventions: inflow and outflow are never negative and net = inflow − outflow. Release from storage counts
  * under inflow, uptake under outflow; storage change = uptake − release; residual = inflow − outflow − storage change,

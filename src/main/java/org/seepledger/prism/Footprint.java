@@ -1,6 +1,5 @@
 package org.seepledger.prism;
 
-import java.util.ArrayList;
 import java.util.List;
 import org.locationtech.jts.algorithm.Area;
 import org.locationtech.jts.geom.Coordinate;
@@ -25,21 +24,16 @@ final class Footprint {
 
     /** {@return the polygons in map coordinates} */
     static MultiPolygon of(Prism prism) {
-        List<Polygon> polygons = new ArrayList<>();
-        List<Ring> rings = prism.rings();
-        int begin = 0;
-        while (begin < rings.size()) {
-            int end = begin + 1;
-            while (end < rings.size() && rings.get(end).island() > 0) {
-                end++;
-            }
-            LinearRing[] islands = rings.subList(begin + 1, end).stream()
-                    .map(ring -> FACTORY.createLinearRing(closed(ring)))
-                    .toArray(LinearRing[]::new);
-            polygons.add(FACTORY.createPolygon(FACTORY.createLinearRing(closed(rings.get(begin))), islands));
-            begin = end;
-        }
-        return FACTORY.createMultiPolygon(polygons.toArray(Polygon[]::new));
+        Polygon[] polygons = prism.parts().stream().map(Footprint::polygon).toArray(Polygon[]::new);
+        return FACTORY.createMultiPolygon(polygons);
+    }
+
+    private static Polygon polygon(List<Ring> part) {
+        List<LinearRing> rings = part.stream()
+                .map(ring -> FACTORY.createLinearRing(closed(ring)))
+                .toList();
+        LinearRing[] islands = rings.stream().skip(1).toArray(LinearRing[]::new);
+        return FACTORY.createPolygon(rings.get(0), islands);
     }
 
     /** {@return the vertices in map coordinates, and the first again} */

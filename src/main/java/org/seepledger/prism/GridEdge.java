@@ -2,7 +2,6 @@ package org.seepledger.prism;
 
 import java.util.ArrayList;
 import java.util.List;
-import org.seepledger.aquifer.Axis;
 import org.seepledger.aquifer.Grid;
 
 /**
@@ -18,9 +17,6 @@ import org.seepledger.aquifer.Grid;
  * the edge stay as they are to the last bit. A side is cut at the same place whichever way round it is given.
  */
 public final class GridEdge {
-
-    private static final double PART_OF_A_CELL = 1e-9;
-    private static final double COORDINATE_STEPS = 4;
 
     private final Grid grid;
     private final Perimeter perimeter;
@@ -40,10 +36,7 @@ public final class GridEdge {
     public static GridEdge of(Grid grid) {
         double width = grid.x().edge(grid.columns());
         double height = grid.y().edge(grid.rows());
-        double farthest =
-                Math.max(Math.abs(grid.x().origin()), Math.abs(grid.y().origin())) + width + height;
-        double cell = Math.min(smallest(grid.x()), smallest(grid.y()));
-        double tolerance = Math.max(PART_OF_A_CELL * cell, COORDINATE_STEPS * Math.ulp(farthest));
+        double tolerance = grid.near() * Math.min(grid.x().smallest(), grid.y().smallest());
         return new GridEdge(grid, new Perimeter(width, height), tolerance);
     }
 
@@ -81,16 +74,7 @@ public final class GridEdge {
      */
     public Prism clip(Prism prism) {
         List<Ring> kept = new ArrayList<>();
-        List<Ring> rings = prism.rings();
-        int begin = 0;
-        while (begin < rings.size()) {
-            int end = begin + 1;
-            while (end < rings.size() && rings.get(end).island() > 0) {
-                end++;
-            }
-            kept.addAll(clipPart(rings.subList(begin, end)));
-            begin = end;
-        }
+        prism.parts().forEach(part -> kept.addAll(clipPart(part)));
         return new Prism(prism.name(), kept, prism.range());
     }
 
@@ -114,13 +98,5 @@ public final class GridEdge {
             return 0;
         }
         return Math.abs(distance - end) <= tolerance ? end : distance;
-    }
-
-    private static double smallest(Axis axis) {
-        double smallest = axis.size(0);
-        for (int i = 1; i < axis.count(); i++) {
-            smallest = Math.min(smallest, axis.size(i));
-        }
-        return smallest;
     }
 }

@@ -30,7 +30,7 @@ public final class PlanOverlap {
     public static Optional<Coverage> of(PrismCut one, PrismCut other, Grid grid) {
         Geometry common =
                 OverlayNGRobust.overlay(Footprint.of(one.prism()), Footprint.of(other.prism()), OverlayNG.INTERSECTION);
-        double sliver = SLIVER * smallestCell(grid);
+        double sliver = SLIVER * (grid.x().smallest() * grid.y().smallest());
         List<Ring> rings = new ArrayList<>();
         for (int i = 0; i < common.getNumGeometries(); i++) {
             if (common.getGeometryN(i) instanceof Polygon polygon && polygon.getArea() > sliver) {
@@ -44,18 +44,6 @@ public final class PlanOverlap {
                 ? Optional.empty()
                 : Optional.of(PrismCut.of(new Prism("common", rings, one.prism().range()), grid)
                         .coverage());
-    }
-
-    private static double smallestCell(Grid grid) {
-        double width = Double.POSITIVE_INFINITY;
-        double height = Double.POSITIVE_INFINITY;
-        for (int column = 0; column < grid.columns(); column++) {
-            width = Math.min(width, grid.x().size(column));
-        }
-        for (int row = 0; row < grid.rows(); row++) {
-            height = Math.min(height, grid.y().size(row));
-        }
-        return width * height;
     }
 
     private static Ring ring(LinearRing line, boolean outer) {

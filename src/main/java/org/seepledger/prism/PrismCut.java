@@ -14,7 +14,7 @@ import org.seepledger.fault.ProgramFault;
 /**
  * A prism cut by a grid: pieces of its sides, shares of its cells. Made once, used for every interval.
  *
- * <p>Vertices within a billionth of a cell of a grid line are put on it. The work is proportional to the perimeter and
+ * <p>Vertices that {@link Grid#near()} counts as on a grid line are put on it. The work is proportional to the perimeter and
  * the rows' spans in cells, not to the grid.
  */
 public final class PrismCut {

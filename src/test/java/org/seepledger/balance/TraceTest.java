@@ -24,6 +24,7 @@ import org.seepledger.ledger.Entry;
 import org.seepledger.ledger.Ledger;
 import org.seepledger.ledger.Period;
 import org.seepledger.ledger.PeriodBudget;
+import org.seepledger.ledger.Total;
 import org.seepledger.prism.Prism;
 import org.seepledger.progress.Progress;
 
@@ -124,33 +125,14 @@ class TraceTest {
                     check(aquifer, prism, rule, TracedRow.of(i, accounts), period, entry.net(), accounts.get(i));
                 }
             }
-            check(
-                    aquifer,
-                    prism,
-                    rule,
-                    total("inflow", accounts),
-                    period,
-                    budget.totals().inflow(),
-                    "inflow");
-            check(
-                    aquifer,
-                    prism,
-                    rule,
-                    total("outflow", accounts),
-                    period,
-                    budget.totals().outflow(),
-                    "outflow");
-            if (ledger.storageKnown()) {
-                double change = budget.totals().storageChange();
-                check(aquifer, prism, rule, total("storage change", accounts), period, change, "storage change");
-                double residual = budget.totals().residual();
-                check(aquifer, prism, rule, total("residual", accounts), period, residual, "residual");
+            for (Total total : Total.rows(ledger.storageKnown())) {
+                double volume = budget.totals().get(total);
+                if (!total.isPercentage() && !Double.isNaN(volume)) {
+                    TracedRow row = TracedRow.of(total, accounts).orElseThrow();
+                    check(aquifer, prism, rule, row, period, volume, total);
+                }
             }
         }
-    }
-
-    private static TracedRow total(String name, List<Account> accounts) {
-        return TracedRow.total(name, accounts).orElseThrow();
     }
 
     private static void check(

@@ -22,12 +22,13 @@ record RasterValues(DataFiles files, String name, BandRule band, String key, Con
 
     @Override
     public void read(int layer, int step, Window window, double[] target, int offset) {
-        try (GeoTiff raster = files.raster(FileName.of(name, layer, step))) {
+        String file = FileName.of(name, layer, step);
+        try (GeoTiff raster = files.raster(file)) {
             int index = band.index(layer, step);
             raster.readStored(index, window, target, offset);
             conversion.apply(raster.scale(index), raster.offset(index), target, offset, window.size());
         } catch (IOException e) {
-            throw Unreadable.file(FileName.of(name, layer, step), e);
+            throw Unreadable.file(file, e);
         }
     }
 
@@ -41,7 +42,7 @@ record RasterValues(DataFiles files, String name, BandRule band, String key, Con
             Stored stored = new Stored(file, "band " + (index + 1), false, values, 1);
             return conversion.parts(stored, raster.scale(index), raster.offset(index), key);
         } catch (IOException e) {
-            throw Unreadable.file(FileName.of(name, layer, step), e);
+            throw Unreadable.file(file, e);
         }
     }
 

@@ -7,7 +7,6 @@ import java.util.logging.Logger;
 import org.geotools.api.referencing.crs.CoordinateReferenceSystem;
 import org.geotools.api.referencing.crs.GeographicCRS;
 import org.geotools.api.referencing.crs.ProjectedCRS;
-import org.geotools.referencing.CRS;
 import org.geotools.referencing.crs.DefaultGeographicCRS;
 import org.seepledger.fault.DataFault;
 import org.seepledger.unit.Measure;
@@ -20,7 +19,10 @@ public final class PlanCrs {
 
     private static final PlanCrs LOCAL = new PlanCrs(Optional.empty(), Optional.empty(), Double.NaN);
 
-    /** What the libraries have to say is not for users. Kept, since the logging framework forgets the level of a logger that nobody holds. */
+    /**
+     * What the libraries have to say is not for users. Kept, since the logging framework forgets the level of a logger
+     * that nobody holds.
+     */
     private static final Logger[] QUIET = {
         quiet("java.util.prefs", Level.OFF), quiet("org.geotools", Level.SEVERE),
     };
@@ -112,13 +114,6 @@ public final class PlanCrs {
     }
 
     /**
-     * {@return the system for GeoTools; nothing when local}
-     */
-    public Optional<CoordinateReferenceSystem> geoTools() {
-        return isLocal() ? Optional.empty() : Optional.of(crs());
-    }
-
-    /**
      * {@return how many length units a plan unit has; exactly 1 when the two are the same}
      *
      * @param lengthUnit the set's length unit
@@ -137,20 +132,6 @@ public final class PlanCrs {
             }
         }
         return metres / inMetres;
-    }
-
-    /**
-     * {@return whether two systems give a place the same coordinates; the EPSG database is not opened when the codes
-     * are the same}
-     *
-     * @param other the other one
-     */
-    public boolean same(PlanCrs other) {
-        if (isLocal() || other.isLocal()) {
-            return isLocal() && other.isLocal();
-        }
-        boolean sameCode = code.isPresent() && code.equals(other.code);
-        return sameCode || CRS.equalsIgnoreMetadata(crs(), other.crs());
     }
 
     /**
@@ -186,7 +167,12 @@ public final class PlanCrs {
         return PlanTransform.between(new NamedCrs(source), new NamedCrs(crs()), shownFile, notes);
     }
 
-    private CoordinateReferenceSystem crs() {
+    /**
+     * {@return the system for GeoTools}
+     *
+     * @throws IllegalStateException if it is local
+     */
+    CoordinateReferenceSystem crs() {
         if (isLocal()) {
             throw new IllegalStateException("local coordinates have no CRS");
         }

@@ -6,14 +6,13 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import org.locationtech.jts.geom.Coordinate;
+import org.seepledger.ledger.ExchangeFlow;
 import org.seepledger.prism.Prism;
 import org.seepledger.prism.Ring;
 import org.seepledger.prism.SideNumbering;
 
 /** Makes a prism of one feature. */
 final class FeatureReader {
-
-    private static final String OUTSIDE = "outside";
 
     private final RingsReader coordinates;
     private final VerticalRangeReader ranges;
@@ -51,10 +50,10 @@ final class FeatureReader {
                             "a text that is not empty and has no blanks at its ends",
                             "Give the prism a property \"name\".");
         }
-        if (name.equals(OUTSIDE)) {
+        if (name.equals(ExchangeFlow.OUTSIDE)) {
             throw spot.in("name")
                     .fault(
-                            "\"outside\", which stands for all that is in no prism",
+                            Spot.quoted(name) + ", which stands for all that is in no prism",
                             "another name",
                             "Rename the prism.");
         }

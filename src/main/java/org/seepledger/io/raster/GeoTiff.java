@@ -102,13 +102,6 @@ public final class GeoTiff implements Closeable {
     }
 
     /**
-     * {@return what stored values are, as {@code int16} or {@code float32}}
-     */
-    public String sampleType() {
-        return image.sample().toString();
-    }
-
-    /**
      * {@return where the raster lies, if the file tells}
      */
     public Optional<Georeference> georeference() {
@@ -205,21 +198,6 @@ public final class GeoTiff implements Closeable {
                 target[start + i] = Double.NaN;
             }
         }
-    }
-
-    /**
-     * {@return one value as it is stored, the nodata value too}
-     *
-     * @param band from 0
-     * @param row from 0 in the north
-     * @param column from 0
-     * @throws DataFault if the file is damaged
-     * @throws IndexOutOfBoundsException if there is no such cell
-     */
-    public double raw(int band, int row, int column) {
-        double[] value = new double[1];
-        readAll(image, band, new Window(row, column, 1, 1), noData.leftOut(), value, 0);
-        return value[0];
     }
 
     private void readAll(TiffImage from, int band, Window window, double leftOut, double[] target, int start) {

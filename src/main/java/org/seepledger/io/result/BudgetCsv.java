@@ -9,6 +9,7 @@ import org.seepledger.ledger.Entry;
 import org.seepledger.ledger.Group;
 import org.seepledger.ledger.Period;
 import org.seepledger.ledger.PeriodBudget;
+import org.seepledger.ledger.Total;
 import org.seepledger.ledger.Totals;
 
 /** Writes {@code budget.csv}: notes, a header, tidy rows by prism, period and account, then the totals. */
@@ -82,27 +83,20 @@ public final class BudgetCsv {
             end(units.rate().toString(), units.volume().toString());
         }
         Totals totals = budget.totals();
-        total(prism, period, "inflow", totals.inflow());
-        total(prism, period, "outflow", totals.outflow());
-        total(prism, period, "storage change", totals.storageChange());
-        total(prism, period, "residual", totals.residual());
-        if (Double.isNaN(totals.storageChange())) {
-            total(prism, period, "unexplained, storage included", totals.inflow() - totals.outflow());
+        for (Total total : Total.rows(!Double.isNaN(totals.storageChange()))) {
+            write(prism, period, total, totals.get(total));
         }
-        percent(prism, period, "closure error", totals.closureError());
-        percent(prism, period, "net closure error", totals.netClosureError());
     }
 
-    private void total(String prism, Period period, String item, double volume) throws IOException {
-        begin(prism, period, Group.TOTAL, item, ALL_LAYERS);
-        nets(rate(volume, period), volume(volume));
-        end(units.rate().toString(), units.volume().toString());
-    }
-
-    private void percent(String prism, Period period, String item, double value) throws IOException {
-        begin(prism, period, Group.TOTAL, item, ALL_LAYERS);
-        nets(CsvText.number(value), NONE);
-        end("%", NONE);
+    private void write(String prism, Period period, Total total, double value) throws IOException {
+        begin(prism, period, Group.TOTAL, total.toString(), ALL_LAYERS);
+        if (total.isPercentage()) {
+            nets(CsvText.number(value), NONE);
+            end("%", NONE);
+        } else {
+            nets(rate(value, period), volume(value));
+            end(units.rate().toString(), units.volume().toString());
+        }
     }
 
     private void nets(String rate, String volume) throws IOException {

@@ -134,18 +134,13 @@ public final class FacesGeoJson {
     private void writePolygons(Prism prism) throws IOException {
         json.writeStringField("type", "MultiPolygon");
         json.writeArrayFieldStart("coordinates");
-        boolean open = false;
-        for (Ring ring : prism.rings()) {
-            if (ring.island() == 0) {
-                if (open) {
-                    json.writeEndArray();
-                }
-                json.writeStartArray();
-                open = true;
+        for (List<Ring> part : prism.parts()) {
+            json.writeStartArray();
+            for (Ring ring : part) {
+                writeRing(ring);
             }
-            writeRing(ring);
+            json.writeEndArray();
         }
-        json.writeEndArray();
         json.writeEndArray();
     }
 

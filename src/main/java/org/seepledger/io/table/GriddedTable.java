@@ -98,11 +98,6 @@ public final class GriddedTable implements AutoCloseable {
         return layout.valueColumns().stream().map(layout.header()::name).toList();
     }
 
-    /** {@return whether lines tell layers apart; else each holds for all} */
-    public boolean hasLayers() {
-        return layout.layer().isPresent();
-    }
-
     /** {@return whether lines tell no cells apart; then each holds for the whole grid} */
     public boolean isWholeGrid() {
         return layout.placement().count() == 1;

@@ -42,7 +42,7 @@ class GriddedTableTest {
             assertThat(plane(values, FRAME, 0, 0)).containsExactly(1, 2, 3, 4, NONE, NONE);
             assertThat(plane(values, FRAME, 1, 2)).containsExactly(1, 2, 3, 4, NONE, NONE);
             assertThat(values.changes()).isFalse();
-            assertThat(table.hasLayers()).isFalse();
+            assertThat(values.layered()).isFalse();
         }
     }
 
@@ -55,7 +55,7 @@ class GriddedTableTest {
             assertThat(plane(values, FRAME, 1, 0)).containsExactly(NONE, NONE, -7, NONE, NONE, NONE);
             assertThat(plane(values, FRAME, 1, 1)).containsOnly(NONE);
             assertThat(values.changes()).isTrue();
-            assertThat(table.hasLayers()).isTrue();
+            assertThat(values.layered()).isTrue();
         }
     }
 
