@@ -5,6 +5,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.stream.IntStream;
 import org.seepledger.aquifer.CellTerm;
 import org.seepledger.aquifer.FaceMismatch;
 import org.seepledger.aquifer.IntervalState;
@@ -13,11 +14,13 @@ import org.seepledger.aquifer.IntervalState;
 final class BandResult {
 
     private final List<List<Tally>> tallies = new ArrayList<>();
+    private final boolean[] flowing;
     private final List<List<Tally>> exchanged = new ArrayList<>();
     private final List<Map<String, Uncounted>> uncounted = new ArrayList<>();
     private Optional<FaceMismatch> mismatch = Optional.empty();
 
     BandResult(List<PrismAccounts> prisms, List<Contact> contacts, int intervals) {
+        flowing = new boolean[intervals];
         for (int interval = 0; interval < intervals; interval++) {
             tallies.add(prisms.stream().map(PrismAccounts::emptyTally).toList());
             exchanged.add(contacts.stream().map(contact -> Contact.emptyTally()).toList());
@@ -38,6 +41,9 @@ final class BandResult {
             uncounted.get(interval).merge(term.item(), new Uncounted(term.missing(), term.lost()), Uncounted::plus);
         }
         state.flows().mismatch().ifPresent(this::note);
+        for (boolean active : state.flows().active()) {
+            flowing[interval] |= active;
+        }
     }
 
     private void note(FaceMismatch found) {
@@ -54,10 +60,19 @@ final class BandResult {
             for (int contact = 0; contact < exchanged.get(interval).size(); contact++) {
                 exchanged(interval, contact).add(other.exchanged(interval, contact));
             }
+            flowing[interval] |= other.flowing[interval];
             Map<String, Uncounted> own = uncounted.get(interval);
             other.uncounted.get(interval).forEach((item, more) -> own.merge(item, more, Uncounted::plus));
         }
         other.mismatch.ifPresent(this::note);
+    }
+
+    /** The intervals, from 0, in which no cell is active. */
+    List<Integer> still() {
+        return IntStream.range(0, flowing.length)
+                .filter(interval -> !flowing[interval])
+                .boxed()
+                .toList();
     }
 
     /** The greatest difference between two given values of one face, if any differ. */

@@ -43,7 +43,7 @@ final class ElevationSlab implements Slab {
 
     /** The part of a cell's saturated height below an elevation. */
     private double partBelow(int cell, double elevation) {
-        if (!geometry.isPresent(cell)) {
+        if (!flows.active()[cell]) {
             return 0;
         }
         double above = elevation - geometry.bottom(cell);
@@ -86,7 +86,7 @@ final class ElevationSlab implements Slab {
         int cell = block.cell(layer, row, column);
         double fromBelow = flows.z()[block.zFace(layer + 1, row, column)];
         double through = flows.z()[block.zFace(layer, row, column)];
-        if (!(elevation > geometry.bottom(cell))) {
+        if (!flows.active()[cell] || elevation <= geometry.bottom(cell)) {
             return fromBelow;
         }
         if (elevation >= geometry.top(cell)) {

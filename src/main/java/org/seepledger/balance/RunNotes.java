@@ -22,6 +22,7 @@ import org.seepledger.prism.WellCut;
  * @param closedSides sides that lie on closed outer faces, by prism
  * @param cutWells wells in cells that a prism cuts
  * @param uncounted what of each source was not counted, in the interval where it was most
+ * @param still intervals, from 0, in which no cell of the prisms' window is active
  * @param mismatch the greatest difference between two given values of one face
  * @param disagreement the greatest difference between the two routes, as a share of gross flow
  */
@@ -31,6 +32,7 @@ public record RunNotes(
         List<ClosedSide> closedSides,
         List<CutWell> cutWells,
         Map<String, Uncounted> uncounted,
+        List<Integer> still,
         Optional<FaceMismatch> mismatch,
         double disagreement) {
 
@@ -67,6 +69,7 @@ public record RunNotes(
         overlaps = List.copyOf(overlaps);
         inactive = List.copyOf(inactive);
         closedSides = List.copyOf(closedSides);
+        still = List.copyOf(still);
         cutWells = List.copyOf(cutWells);
         uncounted = Collections.unmodifiableMap(new LinkedHashMap<>(uncounted));
     }
@@ -98,7 +101,8 @@ public record RunNotes(
             }
             accounts.wells().forEach((well, cut) -> addCutWell(wells, name, well, cut));
         }
-        return new RunNotes(overlaps, inactive, closed, wells, total.uncounted(), total.mismatch(), disagreement);
+        return new RunNotes(
+                overlaps, inactive, closed, wells, total.uncounted(), total.still(), total.mismatch(), disagreement);
     }
 
     private static void addClosedSides(List<ClosedSide> closed, String prism, PrismCut cut) {

@@ -14,7 +14,7 @@ import picocli.CommandLine.Parameters;
 @Command(
         name = "trace",
         description =
-                "Tells where a number of a water budget comes from: every stored value that it rests on, with the weight"
+                "Tells where a number of a water budget comes from: the stored values that add up to it, with the weight"
                         + " that it has in it. Value × weight adds up to the row's net_rate.",
         mixinStandardHelpOptions = true,
         sortOptions = false,

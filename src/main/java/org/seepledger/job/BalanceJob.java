@@ -55,7 +55,7 @@ public final class BalanceJob {
      */
     public static BalanceOutcome run(BalanceRequest request, Progress progress) {
         Stopwatch stopwatch = new Stopwatch();
-        try (OutputFolder out = OutputFolder.at(request.out(), request.overwrite());
+        try (OutputFolder out = OutputFolder.at(request.out(), "balance", request.overwrite());
                 Subject subject = Subject.open(request.aquifer(), request.prisms(), request.clip())) {
             return new BalanceJob(request, subject, stopwatch, progress).run(out);
         }

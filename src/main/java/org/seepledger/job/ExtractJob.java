@@ -43,7 +43,7 @@ public final class ExtractJob {
      * @throws IOException if a file cannot be read or written
      */
     public static String run(ExtractRequest request, Progress progress) throws IOException {
-        try (OutputFolder out = OutputFolder.at(request.out(), request.overwrite());
+        try (OutputFolder out = OutputFolder.at(request.out(), "extract", request.overwrite());
                 Subject subject = Subject.open(request.aquifer(), request.prisms(), request.clip())) {
             return new ExtractJob(request, subject, progress).run(out);
         }
@@ -66,7 +66,7 @@ public final class ExtractJob {
         writeRecord(out);
         List<String> written = out.written();
         out.publish();
-        return summary(cells, prisms, written);
+        return summary(cells, prisms, written.size());
     }
 
     /** Copies the prisms and their surfaces; beside the aquifer's files, or in a folder of their own if names clash. */

@@ -42,13 +42,14 @@ final class OutputFolder implements AutoCloseable {
      *
      * @param target where the files are to go: a new or empty folder, or with {@code overwrite} one that an earlier run
      *     wrote
+     * @param command the command that is run; an earlier run of another one is not replaced
      * @param overwrite whether the files that its run record names may be replaced
      * @return the folder, to be closed
      * @throws UsageFault if the folder cannot be used
      */
-    static OutputFolder at(Path target, boolean overwrite) {
+    static OutputFolder at(Path target, String command, boolean overwrite) {
         Path absolute = target.toAbsolutePath().normalize();
-        Set<String> replaceable = replaceable(target, overwrite);
+        Set<String> replaceable = replaceable(target, command, overwrite);
         List<Path> made = missing(absolute.getParent());
         try {
             Files.createDirectories(absolute.getParent());
@@ -85,7 +86,7 @@ final class OutputFolder implements AutoCloseable {
         }
     }
 
-    private static Set<String> replaceable(Path target, boolean overwrite) {
+    private static Set<String> replaceable(Path target, String command, boolean overwrite) {
         if (Files.exists(target) && !Files.isDirectory(target)) {
             throw new UsageFault("The output folder " + target + " is a file. Name a new or empty folder.");
         }
@@ -102,14 +103,18 @@ final class OutputFolder implements AutoCloseable {
             throw new UsageFault("The output folder " + target + " is not empty and has no " + RunJson.NAME
                     + ", so no earlier run's files can be told apart. Name a new or empty folder.");
         }
-        return recorded(record);
+        return recorded(record, command);
     }
 
     /** The files below the folder that an earlier run's record lists; anything else in it is not ours to touch. */
-    private static Set<String> recorded(Path record) {
+    private static Set<String> recorded(Path record, String command) {
         Set<String> names = new LinkedHashSet<>();
         names.add(RunJson.NAME);
         try {
+            if (!RunJson.command(record).equals(command)) {
+                throw new UsageFault("The output folder holds what \"" + RunJson.command(record) + "\" wrote, not \""
+                        + command + "\". Name a new or empty folder.");
+            }
             RunJson.outputs(record).stream()
                     .filter(output -> isOurs(record.toAbsolutePath().getParent(), output))
                     .forEach(output -> names.add(output.name()));

@@ -76,6 +76,10 @@ final class RunWarnings {
 
     private List<String> ofData(List<PeriodBudget> records) {
         List<String> warnings = new ArrayList<>();
+        for (int interval : notes.still()) {
+            warnings.add("No cell is active in interval " + (interval + 1)
+                    + ": flow or heads have no value there. Its rows are 0 for want of data, not for want of flow.");
+        }
         notes.mismatch().ifPresent(mismatch -> warnings.add(differing(mismatch)));
         notes.uncounted().forEach((item, uncounted) -> addLost(warnings, item, uncounted));
         records.forEach(record -> addSigns(warnings, record));

@@ -139,13 +139,22 @@ final class TransientCase {
         return new Quantity(new ArrayValues(columns, new double[][][] {layers}));
     }
 
-    /** Heads that drain, fill and confine cells; some dry. */
+    /** Heads that drain, fill and confine cells; some dry; none in some columns of cells. */
     private ArrayValues heads() {
         double[][][] heads = new double[INTERVALS + 1][base.layers][base.cells()];
         for (double[][] instant : heads) {
             for (double[] layer : instant) {
                 for (int i = 0; i < layer.length; i++) {
                     layer[i] = random.nextInt(20) == 0 ? Double.NEGATIVE_INFINITY : -30 * random.nextDouble() + 4;
+                }
+            }
+        }
+        for (int i = 0; i < base.cells(); i++) {
+            if (random.nextInt(15) == 0) {
+                for (double[][] instant : heads) {
+                    for (double[] layer : instant) {
+                        layer[i] = Double.NaN;
+                    }
                 }
             }
         }

@@ -238,4 +238,15 @@ class OutputFolderTest {
         refused(files.balance("--overwrite"), "no run record that can be read");
         assertThat(files.out().resolve("mine.txt")).hasContent("mine");
     }
+
+    @Test
+    void doesNotReplaceWhatAnotherCommandWrote() throws IOException {
+        AquiferFiles files = new AquiferFiles(folder);
+        succeeded(files.balance());
+        Path record = files.out().resolve("run.json");
+        String text = Files.readString(record);
+        Files.writeString(record, text.replace("\"command\" : \"balance\"", "\"command\" : \"extract\""));
+        refused(files.balance("--overwrite"), "holds what \"extract\" wrote");
+        assertThat(files.out().resolve("budget.csv")).exists();
+    }
 }

@@ -18,6 +18,7 @@ import org.apache.commons.csv.CSVRecord;
 import org.assertj.core.data.Offset;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.seepledger.aquifer.Window;
 import org.seepledger.balance.Periods;
 import org.seepledger.balance.WellRule;
 import org.seepledger.fault.UsageFault;
@@ -115,7 +116,10 @@ class TraceJobTest {
         if (band.matches()) {
             try (GeoTiff raster = GeoTiff.open(path, file)) {
                 int row = Integer.parseInt(band.group(2)) - 1;
-                return raster.raw(Integer.parseInt(band.group(1)) - 1, row, Integer.parseInt(band.group(3)) - 1);
+                double[] value = new double[1];
+                Window cell = new Window(row, Integer.parseInt(band.group(3)) - 1, 1, 1);
+                raster.readStored(Integer.parseInt(band.group(1)) - 1, cell, value, 0);
+                return value[0];
             }
         }
         if (file.equals("aquifer.json")) {

@@ -131,6 +131,7 @@ public record PrismsReader(
         double width = grid.x().edge(grid.columns());
         double height = grid.y().edge(grid.rows());
         return "corners at " + Spot.point(grid.mapX(0, 0), grid.mapY(0, 0)) + " and "
-                + Spot.point(grid.mapX(width, height), grid.mapY(width, height));
+                + Spot.point(grid.mapX(width, height), grid.mapY(width, height))
+                + (grid.rotation() == 0 ? "" : " opposite each other, turned by " + grid.rotation() + " degrees");
     }
 }

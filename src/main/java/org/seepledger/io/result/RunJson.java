@@ -77,6 +77,27 @@ public final class RunJson {
      * @throws DataFault if it cannot be read or is not the record of a run of this program
      */
     public static List<FileRecord> outputs(Path file) {
+        JsonNode root = read(file);
+        List<FileRecord> outputs = new ArrayList<>();
+        root.path(OUTPUTS)
+                .forEach(output -> outputs.add(new FileRecord(
+                        output.path("name").asText(),
+                        output.path("bytes").asLong(),
+                        output.path("sha256").asText())));
+        return outputs;
+    }
+
+    /**
+     * {@return the command that a run's record names}
+     *
+     * @param file the record
+     * @throws DataFault if it cannot be read or is not the record of a run of this program
+     */
+    public static String command(Path file) {
+        return read(file).path("command").asText();
+    }
+
+    private static JsonNode read(Path file) {
         JsonNode root = JsonFile.read(file, file.toString());
         if (!root.path("program").asText().equals(PROGRAM)) {
             throw new DataFault(
@@ -86,13 +107,7 @@ public final class RunJson {
                     "the record of an earlier run",
                     "It was written by something else.");
         }
-        List<FileRecord> outputs = new ArrayList<>();
-        root.path(OUTPUTS)
-                .forEach(output -> outputs.add(new FileRecord(
-                        output.path("name").asText(),
-                        output.path("bytes").asLong(),
-                        output.path("sha256").asText())));
-        return outputs;
+        return root;
     }
 
     private static void addFiles(ArrayNode array, List<FileRecord> files) {
