@@ -1,8 +1,10 @@
 package org.seepledger.cli;
 
+import java.io.IOException;
 import java.io.PrintStream;
 import org.seepledger.fault.DataFault;
 import org.seepledger.fault.UsageFault;
+import org.seepledger.io.Unreadable;
 import org.seepledger.progress.Cancelled;
 import picocli.CommandLine;
 
@@ -34,6 +36,11 @@ final class Faults {
         }
         if (fault instanceof UsageFault) {
             err.println(fault.getMessage());
+            return USAGE;
+        }
+        if (fault instanceof IOException broken) {
+            err.println("A result cannot be written (" + Unreadable.reason(broken)
+                    + "); nothing is left of it. Make room, or name another place.");
             return USAGE;
         }
         if (fault instanceof Cancelled) {

@@ -7,6 +7,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 import org.seepledger.fault.UsageFault;
+import org.seepledger.io.Unreadable;
 
 /** A single file that a run writes: built aside and moved into place whole; a run that ends early leaves nothing behind. */
 final class OutputFile implements AutoCloseable {
@@ -37,8 +38,8 @@ final class OutputFile implements AutoCloseable {
             String name = "." + absolute.getFileName() + "-building-";
             return new OutputFile(absolute, Files.createTempFile(absolute.getParent(), name, ""));
         } catch (IOException e) {
-            throw new UsageFault("The output file " + target + " cannot be written: " + e.getMessage()
-                    + ". Name a file where you may write.");
+            throw new UsageFault("The output file " + target + " cannot be written (" + Unreadable.reason(e)
+                    + "). Name a file where you may write.");
         }
     }
 
@@ -76,7 +77,7 @@ final class OutputFile implements AutoCloseable {
         try {
             Files.move(aside, target, StandardCopyOption.REPLACE_EXISTING);
         } catch (IOException e) {
-            throw new UsageFault("The file cannot be moved to " + target + ": " + e.getMessage());
+            throw new UsageFault("The file cannot be moved to " + target + " (" + Unreadable.reason(e) + ").");
         }
     }
 
