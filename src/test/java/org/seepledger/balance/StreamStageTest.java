@@ -67,7 +67,7 @@ class StreamStageTest {
         return WIDTH * TRANSMISSIVITY * RISE * 2 / Math.sqrt(Math.PI) / spread(time) * Math.exp(-scaled * scaled);
     }
 
-    /** Volume in storage between the bank and a place, from ∫ erfc = x erfc x − exp(−x²)/√π (A. and S. 1964, 7.2.1, 7.2.7). */
+    /** Volume in storage between the bank and a place, from ∫ erfc = x erfc x − exp(−x²)/√π (A. and S. 1964, 7.2.1, 7.2.5). */
     private static double stored(double x, double time) {
         double scaled = x / spread(time);
         double integral = scaled * Erf.erfc(scaled) + (1 - Math.exp(-scaled * scaled)) / Math.sqrt(Math.PI);

@@ -97,7 +97,7 @@ class TransientWellTest {
         return Shapes.box(CENTRE - HALF, CENTRE - HALF, CENTRE + HALF, CENTRE + HALF);
     }
 
-    /** Values by Wenzel (1942, USGS Water-Supply Paper 887), table of W(u); the first by quadrature too, to more digits. */
+    /** Values by Wenzel (1942, USGS Water-Supply Paper 887), table of W(u), from memory; each by quadrature too. */
     @ParameterizedTest
     @CsvSource({"1e-4, 8.6332", "0.01, 4.0379", "0.1, 1.8229", "1, 0.2194"})
     void theWellFunctionAgreesWithTheTable(double u, double tabulated) {
