@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import org.seepledger.aquifer.Aquifer;
+import org.seepledger.aquifer.Times;
 import org.seepledger.balance.Balance;
 import org.seepledger.balance.Periods;
 import org.seepledger.balance.WaterBalance;
@@ -23,7 +24,6 @@ import org.seepledger.io.result.Statement;
 import org.seepledger.ledger.Ledger;
 import org.seepledger.ledger.Period;
 import org.seepledger.ledger.PeriodBudget;
-import org.seepledger.prism.Prism;
 import org.seepledger.progress.Progress;
 import org.seepledger.report.BalanceSummary;
 
@@ -34,12 +34,16 @@ public final class BalanceJob {
     private final Subject subject;
     private final Progress progress;
     private final Stopwatch stopwatch;
+    private final ResultUnits units;
+    private final List<Period> periods;
 
     private BalanceJob(BalanceRequest request, Subject subject, Stopwatch stopwatch, Progress progress) {
         this.request = request;
         this.subject = subject;
         this.stopwatch = stopwatch;
         this.progress = progress;
+        this.units = subject.units(request.rateUnit(), request.volumeUnit());
+        this.periods = subject.periods(request.every(), request.periods(), request.waterYearStart());
     }
 
     /**
@@ -62,41 +66,41 @@ public final class BalanceJob {
     }
 
     private BalanceOutcome run(OutputFolder out) {
-        Aquifer aquifer = subject.aquifer();
-        List<String> warnings = subject.warnings();
-        ResultUnits units = subject.units(request.rateUnit(), request.volumeUnit());
-        List<Prism> prisms = subject.prisms();
-        List<Period> periods = subject.periods(request.every(), request.periods(), request.waterYearStart());
         stopwatch.lap("reading");
-        Balance balance = WaterBalance.of(aquifer, prisms, request.wells(), request.threads(), progress);
+        Aquifer aquifer = subject.aquifer();
+        Balance balance = WaterBalance.of(aquifer, subject.prisms(), request.wells(), request.threads(), progress);
         stopwatch.lap("balancing");
         Period whole = new Periods(aquifer.times()).record();
         List<PeriodBudget> records =
                 balance.ledgers().stream().map(ledger -> ledger.budget(whole)).toList();
         RunWarnings words = new RunWarnings(aquifer, balance.notes());
-        warnings.addAll(words.warnings(records));
+        subject.warnings().addAll(words.warnings(records));
         subject.notes().addAll(words.remarks(request.wells()));
-        List<PrismBudget> budgets = balance.ledgers().stream()
-                .map(ledger -> budget(ledger, periods))
-                .toList();
-        Statement statement = subject.statement("Water budget of \"" + aquifer.name() + "\"", progress);
+        List<PrismBudget> budgets = balance.ledgers().stream().map(this::budget).toList();
+        write(out, balance, budgets, records);
+        List<String> files = out.written();
+        out.publish();
+        String summary = BalanceSummary.of(aquifer, balance, budgets, units, subject.warnings(), subject.notes());
+        return new BalanceOutcome(summary, worst(budgets), files);
+    }
+
+    private void write(OutputFolder out, Balance balance, List<PrismBudget> budgets, List<PeriodBudget> records) {
+        Times times = subject.aquifer().times();
+        Statement statement =
+                subject.statement("Water budget of \"" + subject.aquifer().name() + "\"", progress);
         try {
-            BudgetCsv.write(out.file("budget.csv"), statement, budgets, aquifer.times(), units);
-            ExchangeCsv.write(out.file("exchange.csv"), statement, balance.exchange(), periods, aquifer.times(), units);
-            FacesGeoJson.write(out.file("faces.geojson"), subject.crs(), prisms, records, units);
+            BudgetCsv.write(out.file("budget.csv"), statement, budgets, times, units);
+            ExchangeCsv.write(out.file("exchange.csv"), statement, balance.exchange(), periods, times, units);
+            FacesGeoJson.write(out.file("faces.geojson"), subject.crs(), subject.prisms(), records, units);
             writeImbalance(balance, out);
             writeRecord(out, statement, balance);
         } catch (IOException e) {
             throw new UsageFault("The results cannot be written beside " + request.out() + " (" + Unreadable.reason(e)
                     + "). Make room or name another folder.");
         }
-        List<String> files = out.written();
-        out.publish();
-        String summary = BalanceSummary.of(aquifer, balance, budgets, units, warnings, subject.notes());
-        return new BalanceOutcome(summary, worst(budgets), files);
     }
 
-    private static PrismBudget budget(Ledger ledger, List<Period> periods) {
+    private PrismBudget budget(Ledger ledger) {
         return new PrismBudget(
                 ledger.prism(), periods.stream().map(ledger::budget).toList());
     }

@@ -3,9 +3,6 @@ package org.seepledger.io.aquifer;
 import com.fasterxml.jackson.databind.JsonNode;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.time.LocalDate;
-import java.time.LocalDateTime;
-import java.time.format.DateTimeParseException;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -20,7 +17,6 @@ import org.seepledger.aquifer.Layer;
 import org.seepledger.aquifer.Source;
 import org.seepledger.aquifer.Storage;
 import org.seepledger.aquifer.StorageKnowledge;
-import org.seepledger.aquifer.Times;
 import org.seepledger.fault.DataFault;
 import org.seepledger.io.DataFolder;
 import org.seepledger.io.JsonFile;
@@ -35,9 +31,6 @@ public final class AquiferReader {
 
     /** The file that describes the set. */
     public static final String FILE = "aquifer.json";
-
-    /** Some five thousand years. */
-    private static final int MOST_DAYS = 2_000_000;
 
     private final JsonNode root;
     private final String folderName;
@@ -89,7 +82,7 @@ public final class AquiferReader {
                 root.path("crs").isTextual() ? PlanCrs.of(root.get("crs").textValue(), FILE, "crs") : PlanCrs.local();
         Grid grid = GridReader.read(root.get("grid"), crs.planUnit(length), files);
         JsonNode layerNodes = root.get("layers");
-        Frame frame = new Frame(grid, layerNodes.size(), times());
+        Frame frame = new Frame(grid, layerNodes.size(), TimesReader.read(root, time));
         Bindings bindings = new Bindings(files, frame);
         List<Layer> layers = layers(layerNodes, bindings);
         Flow flow = new FlowReader(root.get("flow"), root.has("head"), bindings, length, time, warnings).read();
@@ -124,51 +117,6 @@ public final class AquiferReader {
             throw new DataFault(FILE, key, "the unknown unit \"" + text + "\"", expected, remedy);
         }
         throw new DataFault(FILE, key, "\"" + text + "\", the unit of something else", expected, "Correct the unit.");
-    }
-
-    private Times times() {
-        try {
-            Times times = new Times(GridReader.numbers(root.get("times")), time, startDate());
-            checkCalendar(times);
-            return times;
-        } catch (IllegalArgumentException e) {
-            throw new DataFault(
-                    FILE,
-                    "times",
-                    "times that cannot be (" + e.getMessage() + ")",
-                    "increasing instants",
-                    "Sort them and leave repeats out.");
-        }
-    }
-
-    /** Beyond four-digit years a date is a mistake, and calendar periods would be too many to count. */
-    private static void checkCalendar(Times times) {
-        double days = (times.instant(times.intervals()) - times.instant(0))
-                * times.unit().in(Measure.of("d"));
-        if (times.hasDates() && !(days < MOST_DAYS)) {
-            throw new DataFault(
-                    FILE,
-                    "times",
-                    "times that last " + days + " days, with a start_date",
-                    "fewer than " + MOST_DAYS + " days",
-                    "Correct the times or the time_unit, or leave the start_date out.");
-        }
-    }
-
-    private Optional<LocalDateTime> startDate() {
-        if (!root.has("start_date")) {
-            return Optional.empty();
-        }
-        String text = root.get("start_date").textValue();
-        try {
-            return Optional.of(
-                    text.contains("T")
-                            ? LocalDateTime.parse(text)
-                            : LocalDate.parse(text).atStartOfDay());
-        } catch (DateTimeParseException e) {
-            throw new DataFault(
-                    FILE, "start_date", "\"" + text + "\"", "an ISO 8601 date as 2021-10-01", "Correct the date.");
-        }
     }
 
     private List<Layer> layers(JsonNode nodes, Bindings bindings) {

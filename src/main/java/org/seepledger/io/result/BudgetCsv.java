@@ -59,7 +59,7 @@ public final class BudgetCsv {
      */
     public static void write(Path file, Statement statement, List<PrismBudget> budgets, Times times, ResultUnits units)
             throws IOException {
-        try (ResultTable rows = ResultTable.open(file, statement, HEADER)) {
+        try (ResultTable rows = ResultTable.open(file, statement.lines(), HEADER)) {
             BudgetCsv table = new BudgetCsv(times, units, rows);
             for (PrismBudget prism : budgets) {
                 for (PeriodBudget budget : prism.periods()) {

@@ -46,7 +46,7 @@ public final class ExchangeCsv {
             Times times,
             ResultUnits units)
             throws IOException {
-        try (ResultTable table = ResultTable.open(file, statement, HEADER)) {
+        try (ResultTable table = ResultTable.open(file, statement.lines(), HEADER)) {
             for (Period period : periods) {
                 for (ExchangeFlow flow : flows) {
                     double volume = flow.volume(period);

@@ -6,6 +6,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.LocalDateTime;
 import java.time.format.DateTimeFormatter;
+import java.util.List;
 import org.apache.commons.csv.CSVFormat;
 import org.apache.commons.csv.CSVPrinter;
 import org.seepledger.aquifer.Times;
@@ -23,10 +24,10 @@ final class ResultTable implements AutoCloseable {
         this.rows = new CSVPrinter(text, CSVFormat.RFC4180);
     }
 
-    /** Begins a table with its notes and header. */
-    static ResultTable open(Path file, Statement statement, String... header) throws IOException {
+    /** Begins a table with its notes, a line each, and header. */
+    static ResultTable open(Path file, List<String> notes, String... header) throws IOException {
         Writer text = Files.newBufferedWriter(file);
-        for (String line : statement.lines()) {
+        for (String line : notes) {
             text.write("# " + line + "\r\n");
         }
         ResultTable table = new ResultTable(text);

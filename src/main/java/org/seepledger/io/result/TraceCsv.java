@@ -2,12 +2,9 @@ package org.seepledger.io.result;
 
 import java.io.IOException;
 import java.io.UncheckedIOException;
-import java.io.Writer;
-import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.List;
-import org.apache.commons.csv.CSVFormat;
-import org.apache.commons.csv.CSVPrinter;
 import org.seepledger.io.table.CsvText;
 
 /** Writes a trace: notes, a header {@code file,place,value,weight}, a line for each stored number. */
@@ -16,9 +13,9 @@ public final class TraceCsv implements AutoCloseable {
     /** How the title of every trace begins. */
     public static final String TITLE = "Trace of ";
 
-    private final CSVPrinter rows;
+    private final ResultTable rows;
 
-    private TraceCsv(CSVPrinter rows) {
+    private TraceCsv(ResultTable rows) {
         this.rows = rows;
     }
 
@@ -32,16 +29,9 @@ public final class TraceCsv implements AutoCloseable {
      * @throws IOException if it cannot be written
      */
     public static TraceCsv open(Path file, Statement statement, List<String> more) throws IOException {
-        Writer text = Files.newBufferedWriter(file);
-        for (String line : statement.lines()) {
-            text.write("# " + line + "\r\n");
-        }
-        for (String line : more) {
-            text.write("# " + line.replaceAll("\\p{Cntrl}+", " ") + "\r\n");
-        }
-        CSVPrinter printer = new CSVPrinter(text, CSVFormat.RFC4180);
-        printer.printRecord("file", "place", "value", "weight");
-        return new TraceCsv(printer);
+        List<String> notes = new ArrayList<>(statement.lines());
+        more.forEach(line -> notes.add(line.replaceAll("\\p{Cntrl}+", " ")));
+        return new TraceCsv(ResultTable.open(file, notes, "file", "place", "value", "weight"));
     }
 
     /**
@@ -54,7 +44,11 @@ public final class TraceCsv implements AutoCloseable {
      */
     public void line(String file, String place, double value, double weight) {
         try {
-            rows.printRecord(CsvText.text(file), CsvText.text(place), CsvText.number(value), CsvText.number(weight));
+            rows.cell(CsvText.text(file));
+            rows.cell(CsvText.text(place));
+            rows.cell(CsvText.number(value));
+            rows.cell(CsvText.number(weight));
+            rows.endRow();
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }
