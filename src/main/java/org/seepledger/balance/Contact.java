@@ -3,7 +3,6 @@ package org.seepledger.balance;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import org.seepledger.aquifer.Block;
 import org.seepledger.aquifer.FaceFlows;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.IntervalState;
@@ -109,18 +108,8 @@ final class Contact {
     private void bookRisers(
             IntervalState state, Coverage coverage, Slab ofOne, Slab ofOther, int row, int column, Tally tally) {
         FaceFlows flows = state.flows();
-        Block block = flows.block();
-        double toWest = coverage.westFace(row, column);
-        double toNorth = coverage.northFace(row, column);
-        for (int layer = 0; layer < block.layers(); layer++) {
-            if (toWest != 0 && column > 0) {
-                double flow = toWest * flows.x()[block.xFace(layer, row, column)];
-                bookRiser(new Riser(layer, row, column - 1, row, column, flow), ofOne, ofOther, tally);
-            }
-            if (toNorth != 0 && row > 0) {
-                double flow = toNorth * flows.y()[block.yFace(layer, row, column)];
-                bookRiser(new Riser(layer, row, column, row - 1, column, flow), ofOne, ofOther, tally);
-            }
+        for (int layer = 0; layer < flows.block().layers(); layer++) {
+            Riser.around(flows, coverage, layer, row, column, riser -> bookRiser(riser, ofOne, ofOther, tally));
         }
     }
 

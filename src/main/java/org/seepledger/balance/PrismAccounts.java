@@ -136,18 +136,8 @@ final class PrismAccounts {
     }
 
     private void bookRisers(FaceFlows flows, Slab slab, int row, int column, Bookings bookings) {
-        Block block = flows.block();
-        double toWest = cut.coverage().westFace(row, column);
-        double toNorth = cut.coverage().northFace(row, column);
         for (int layer = chart.first(); layer <= chart.last(); layer++) {
-            if (toWest != 0 && column > 0) {
-                double flow = toWest * flows.x()[block.xFace(layer, row, column)];
-                bookRiser(new Riser(layer, row, column - 1, row, column, flow), slab, bookings);
-            }
-            if (toNorth != 0 && row > 0) {
-                double flow = toNorth * flows.y()[block.yFace(layer, row, column)];
-                bookRiser(new Riser(layer, row, column, row - 1, column, flow), slab, bookings);
-            }
+            Riser.around(flows, cut.coverage(), layer, row, column, riser -> bookRiser(riser, slab, bookings));
         }
     }
 

@@ -1,5 +1,10 @@
 package org.seepledger.balance;
 
+import java.util.function.Consumer;
+import org.seepledger.aquifer.Block;
+import org.seepledger.aquifer.FaceFlows;
+import org.seepledger.prism.Coverage;
+
 /**
  * A face between two cells of a layer, where a prism's lids may make a step.
  *
@@ -11,6 +16,21 @@ package org.seepledger.balance;
  * @param flow what flows from the one to the other through the part of the face inside, length³/time
  */
 record Riser(int layer, int row, int column, int nextRow, int nextColumn, double flow) {
+
+    /** Finds the faces of a cell to the west and north that lie inside, at least in part. */
+    static void around(FaceFlows flows, Coverage coverage, int layer, int row, int column, Consumer<Riser> found) {
+        Block block = flows.block();
+        double toWest = coverage.westFace(row, column);
+        if (toWest != 0 && column > 0) {
+            double flow = toWest * flows.x()[block.xFace(layer, row, column)];
+            found.accept(new Riser(layer, row, column - 1, row, column, flow));
+        }
+        double toNorth = coverage.northFace(row, column);
+        if (toNorth != 0 && row > 0) {
+            double flow = toNorth * flows.y()[block.yFace(layer, row, column)];
+            found.accept(new Riser(layer, row, column, row - 1, column, flow));
+        }
+    }
 
     /** What leaves through the top's step. */
     double throughTop(Slab slab) {

@@ -129,7 +129,7 @@ public final class TraceJob {
                         + "; value x weight over all lines adds up to it, within " + AGREES
                         + " of the row's gross flow. Lines of the same place add.",
                 "value: as it stands in the file, before scale, offset and unit. weight: what net_rate grows by for each"
-                        + " unit of it, all else as it stands. Flow was given as "
+                        + " unit of it, all else, saturated thickness among it, as it stands. Flow was given as "
                         + subject.aquifer().flow().given() + ".",
                 "An offset and a number in aquifer.json are lines of their own. A dry cell's head has weight 0, and its"
                         + " bottom stands in for it.");
