@@ -81,6 +81,19 @@ final class ElevationSlab implements Slab {
                 - upward(layer, row, column, elevations.bottom(row, column));
     }
 
+    /** Beside the faces' flows, what enters in a sheet: it may leave through a lid alone. */
+    @Override
+    public double gross(int layer, int row, int column) {
+        int cell = block.cell(layer, row, column);
+        double gross = flows.gross(layer, row, column);
+        for (CellTerm term : state.terms()) {
+            if (term.entry() != CellTerm.Entry.THROUGHOUT) {
+                gross += Math.abs(term.rates()[cell]);
+            }
+        }
+        return gross;
+    }
+
     /** Upward flow through a cell at an elevation; through its top or bottom where that lies beyond it. */
     private double upward(int layer, int row, int column, double elevation) {
         int cell = block.cell(layer, row, column);

@@ -29,6 +29,11 @@ record LayerSlab(Chart chart, IntervalState state) implements Slab {
     }
 
     @Override
+    public double gross(int layer, int row, int column) {
+        return state.flows().gross(layer, row, column);
+    }
+
+    @Override
     public double top(int row, int column) {
         CellGeometry geometry = state.geometry();
         for (int layer = chart.first(); layer <= chart.last(); layer++) {

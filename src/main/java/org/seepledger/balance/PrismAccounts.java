@@ -175,7 +175,7 @@ final class PrismAccounts {
                         layer - chart.first(), share * state.geometry().grid().area(row, column));
                 continue;
             }
-            bookings.fromVolume(share * slab.outflow(layer, row, column), flows.gross(layer, row, column));
+            bookings.fromVolume(share * slab.outflow(layer, row, column), slab.gross(layer, row, column));
             for (int i = 0; i < termAccounts.length; i++) {
                 CellTerm term = state.terms().get(i);
                 double counted = share * slab.counted(term.entry(), layer, row, column);

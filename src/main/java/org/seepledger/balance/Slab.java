@@ -22,6 +22,9 @@ interface Slab {
     /** What the part of a cell within the range sends out through all faces, length³/time, if its plan area is whole. */
     double outflow(int layer, int row, int column);
 
+    /** The magnitudes that {@link #outflow} is made of, summed: what its rounding is measured against. */
+    double gross(int layer, int row, int column);
+
     /** The elevation of the prism's top at a column of cells, in length units; NaN where the range misses the column. */
     double top(int row, int column);
 

@@ -6,7 +6,7 @@
  * worked out twice, by different routes: piece by piece along its boundary, and as the integral of the cells' own gains
  * over its volume. In the lowest-order field of Raviart and Thomas (1977) the two are the same for any polygon; a
  * difference beyond {@value org.seepledger.balance.WaterBalance#ROUTES_AGREE} of the gross flow through the faces of
- * the cells touched is a fault of the program, and no result is given out.
+ * the cells touched, and of what enters at the water table where a lid lies at an elevation, is a fault of the program, and no result is given out.
  *
  * <p>A {@link org.seepledger.balance.Trace} goes the way back: a row is linear in the stored numbers, and ones are booked
  * in their place, by the same code, to find their weights. Given face flows, flux and heads count while thicknesses,

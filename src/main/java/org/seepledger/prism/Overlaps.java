@@ -13,8 +13,8 @@ import org.seepledger.aquifer.GriddedValues;
 import org.seepledger.prism.VerticalRange.Layers;
 
 /**
- * Finds prisms that overlap: in plan by more than a billionth of the smaller one's area, and in height somewhere in
- * that area.
+ * Finds prisms that overlap: in plan by more than a billionth of the smaller one's area and more than a strip as thin as
+ * the nearness at which two places count as one, and in height somewhere in that area.
  *
  * <p>Two stacks of whole layers overlap in height when they have a layer in common. Elevations and surfaces are compared
  * cell by cell, in the cells that the common area lies in, with the layers' own surfaces where the other prism is a
@@ -66,7 +66,8 @@ public final class Overlaps {
         }
         Geometry common = OverlayNGRobust.overlay(shape, otherShape, OverlayNG.INTERSECTION);
         double smaller = Math.min(shape.getArea(), otherShape.getArea());
-        if (common.getArea() <= SHARE * smaller || !meet(one.range(), other.range(), common)) {
+        double strip = grid.near() * Math.min(grid.x().smallest(), grid.y().smallest()) * common.getLength();
+        if (common.getArea() <= Math.max(SHARE * smaller, strip) || !meet(one.range(), other.range(), common)) {
             return Optional.empty();
         }
         double area = common.getArea() * grid.planUnit() * grid.planUnit();

@@ -21,7 +21,9 @@ import org.seepledger.progress.Progress;
 
 /**
  * What two prisms give to each other is inside their union: what they give to the outside is what the union does. Without
- * wells, whose share of a piece is spread evenly along it before in and out are told apart.
+ * wells, whose share of a piece is spread evenly along it before in and out are told apart. Far from the origin the map
+ * coordinates of a vertex on a shared side are rounded to 2e-9 of a cell, so the side itself moves by that much, where the
+ * flow per width may be hundreds of times its mean.
  */
 class ExchangeTest {
 
@@ -92,9 +94,10 @@ class ExchangeTest {
                 double faces = faces(union, interval, out);
                 double scale = 1
                         + faces
+                        + faces(union, interval, !out)
                         + rate(parts, one.name(), other.name(), interval)
                         + rate(parts, other.name(), one.name(), interval);
-                assertThat(given).isCloseTo(faces, Offset.offset(1e-7 * scale));
+                assertThat(given).isCloseTo(faces, Offset.offset(1e-6 * scale));
             }
         }
     }

@@ -1,9 +1,15 @@
 package org.seepledger.balance;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.Random;
+import java.util.stream.Stream;
+import org.locationtech.jts.geom.Coordinate;
+import org.locationtech.jts.geom.GeometryFactory;
+import org.locationtech.jts.geom.LinearRing;
+import org.locationtech.jts.geom.Polygon;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.ArrayValues;
 import org.seepledger.aquifer.Axis;
@@ -21,6 +27,7 @@ import org.seepledger.aquifer.Well;
 import org.seepledger.prism.Prism;
 import org.seepledger.prism.Prisms;
 import org.seepledger.prism.Ring;
+import org.seepledger.prism.Side;
 import org.seepledger.unit.Measure;
 
 /** A random heterogeneous aquifer and prisms in it, from a seed. */
@@ -163,7 +170,27 @@ final class RandomCase {
         if (two) {
             rings.add(star(2, 0, 0.8 * width, height / 2, 0.18 * width, 0.45 * height, false));
         }
-        return Prisms.of(name, first, last, rings);
+        Prism prism = Prisms.of(name, first, last, rings);
+        return isValid(prism) ? prism : prism(name);
+    }
+
+    /** Vertices put on grid lines may make sides cross, or an island reach out. */
+    private static boolean isValid(Prism prism) {
+        return prism.parts().stream().map(RandomCase::polygon).allMatch(Polygon::isValid);
+    }
+
+    private static Polygon polygon(List<Ring> part) {
+        GeometryFactory factory = new GeometryFactory();
+        LinearRing[] lines = part.stream()
+                .map(ring -> factory.createLinearRing(closed(ring.sides())))
+                .toArray(LinearRing[]::new);
+        return factory.createPolygon(lines[0], Arrays.copyOfRange(lines, 1, lines.length));
+    }
+
+    private static Coordinate[] closed(List<Side> sides) {
+        return Stream.concat(sides.stream(), Stream.of(sides.get(0)))
+                .map(side -> new Coordinate(side.x(), side.y()))
+                .toArray(Coordinate[]::new);
     }
 
     private Ring star(int part, int island, double cx, double cy, double rx, double ry, boolean clockwise) {

@@ -59,6 +59,21 @@ class OverlapsTest {
                 .hasSize(1);
     }
 
+    /** At 8e6 units from the origin a step of the number format is 9e-10 units, and more than a billionth of these prisms' width. */
+    @Test
+    void neighboursFarFromTheOriginDoNotOverlap() {
+        double far = 8_388_608;
+        Grid grid = new Grid(Axis.even(far, 1, 10), Axis.even(0, 1, 10), 0, 1);
+        Overlaps overlaps = new Overlaps(grid, 3, surface -> GriddedValues.constant(30 - 10.0 * surface));
+        double middle = far + 0.5;
+        Layers all = new Layers(0, 2);
+        Prism west = box("A", middle - 0.1, 1, middle, 5, all);
+        assertThat(overlaps.of(List.of(west, box("B", Math.nextDown(middle), 1, middle + 0.1, 5, all))))
+                .isEmpty();
+        assertThat(overlaps.of(List.of(west, box("B", middle - 1e-7, 1, middle + 0.1, 5, all))))
+                .hasSize(1);
+    }
+
     @Test
     void aTinyPrismWithinALargeOneOverlapsIt() {
         Layers all = new Layers(0, 2);
