@@ -53,10 +53,10 @@ public final class Lettering {
             return words;
         }
         int[] letters = words.codePoints().toArray();
-        int kept = letters.length;
         String cut = "…";
-        while (kept > 0 && width(cut = new String(letters, 0, kept).strip() + "…", size) > width) {
-            kept--;
+        for (int kept = letters.length - 1; kept > 0 && cut.equals("…"); kept--) {
+            String shorter = new String(letters, 0, kept).strip() + "…";
+            cut = width(shorter, size) <= width ? shorter : cut;
         }
         return cut;
     }
