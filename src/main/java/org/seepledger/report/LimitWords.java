@@ -43,8 +43,10 @@ final class LimitWords {
     }
 
     private void addNotGiven(List<String> sentences) {
-        List<String> names =
-                terms.stream().filter(term -> !term.quantified()).map(Term::name).toList();
+        List<String> names = terms.stream()
+                .filter(term -> !term.quantified())
+                .map(Term::name)
+                .toList();
         if (!names.isEmpty()) {
             sentences.add("No flow can be given for " + Wording.listed(names) + "; totals count it as 0.");
         }
@@ -88,11 +90,9 @@ final class LimitWords {
     }
 
     private void addCombined(List<String> sentences) {
-        List<Term> flowing =
-                terms.stream().filter(term -> term.gross() > 0).toList();
-        List<Term> stating = flowing.stream()
-                .filter(term -> !Double.isNaN(deviation(term)))
-                .toList();
+        List<Term> flowing = terms.stream().filter(term -> term.gross() > 0).toList();
+        List<Term> stating =
+                flowing.stream().filter(term -> !Double.isNaN(deviation(term))).toList();
         List<String> silent = flowing.stream()
                 .filter(term -> !stating.contains(term))
                 .map(Term::name)
@@ -125,8 +125,8 @@ final class LimitWords {
         List<String> names =
                 terms.stream().filter(origins::byDifference).map(Term::name).toList();
         if (!names.isEmpty()) {
-            sentences.add("Computed by difference, so that closure is no evidence for it: " + Wording.listed(names)
-                    + ".");
+            sentences.add(
+                    "Computed by difference, so that closure is no evidence for it: " + Wording.listed(names) + ".");
         }
     }
 }
