@@ -74,7 +74,7 @@ final class LimitWords {
     private void addBelowUncertainty(List<String> sentences) {
         List<String> names = Term.bySize(terms).stream()
                 .filter(term -> term.gross() > 0 && Math.abs(term.net()) < deviation(term))
-                .map(term -> term.name() + " (net " + wording.rate(term.net(), time) + ", deviation "
+                .map(term -> term.name() + " (net " + wording.rate(term.net(), time) + ", standard deviation "
                         + wording.rate(deviation(term), time) + ")")
                 .toList();
         if (!names.isEmpty()) {
