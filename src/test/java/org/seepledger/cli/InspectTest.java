@@ -142,6 +142,41 @@ class InspectTest {
                 .containsPattern("effective porosity of chloride +1 +0\\.2000");
     }
 
+    @ParameterizedTest
+    @CsvSource(
+            delimiter = '|',
+            value = {
+                "-3 | 12 of 12 values of \"head\" lie below the lowest layer's bottom, most by 3 m: -3 m at row 1, column 1.",
+                "{'value': 9, 'unit': 'ft'} | none",
+                "19 | none",
+                "21 | values of \"head\" lie above the uppermost layer's top by more than all layers are thick, most by 11 m",
+            })
+    void doubtsHeadsInAnotherUnitOrDatum(String head, String words) {
+        String warned = warnings(files().with("flow/z", "1e-3").with("head", head));
+        assertThat(warned).contains(words);
+    }
+
+    @Test
+    void tellsHowManyHeadsAreDoubted() {
+        AquiferFiles files = files().with("flow/z", "1e-3")
+                .with("head", "{'file': 'h.csv'}")
+                .with("storage", "{'specific_yield': 0.1, 'specific_storage': 1e-5}");
+        String heads = "row,col,instant,h\n1,1,0,9\n2,3,2,-8\n1,2,1,-1\n1,2,2,-2\n";
+        assertThat(warnings(files.file("h.csv", heads)))
+                .contains("3 of 4 values of \"head\" lie below", "most by 8 m: -8 m at row 2, column 3, instant 2.");
+        assertThat(warnings(
+                        files.file("h.csv", heads.replace("1,2,2,-2", "1,2,2,2").replace("1,2,1,-1", "1,2,1,1"))))
+                .doesNotContain("lie below");
+    }
+
+    @Test
+    void doubtsHeadsAboveConfinedLayersInNoWay() {
+        AquiferFiles files = files().with("flow/z", "1e-3")
+                .with("layers", "[{'top': 10, 'bottom': 5, 'water_table': false}, {'bottom': 0}]")
+                .with("head", "400");
+        assertThat(warnings(files)).isEqualTo("  none");
+    }
+
     @Test
     void doubtsAnOpenTopBesideRecharge() {
         AquiferFiles files = files().with("flow/outer_faces", "{'top': 'open'}")
