@@ -26,8 +26,8 @@ import org.seepledger.balance.Periods.Every;
 import org.seepledger.balance.WellRule;
 import org.seepledger.job.BalanceJob;
 import org.seepledger.job.BalanceRequest;
-import org.seepledger.job.ReportRequest;
 import org.seepledger.job.InspectJob;
+import org.seepledger.job.ReportRequest;
 import org.seepledger.progress.Progress;
 
 /** The examples of {@code docs/formats.md} run as they stand, and the numbers that the page works out by hand hold. */
@@ -149,7 +149,7 @@ class DocsExamplesTest {
                         false,
                         1,
                         false,
- ReportRequest.dated(LocalDate.of(2024, 5, 31))),
+                        ReportRequest.dated(LocalDate.of(2024, 5, 31))),
                 Progress.NONE);
         CSVFormat format =
                 CSVFormat.RFC4180.builder().setCommentMarker('#').setHeader().get();

@@ -80,12 +80,12 @@ final class ReportOptions {
             return List.of();
         }
         List<String> lines = Arrays.stream(letterhead.split("\\||\\R"))
-                .map(text -> line("--report-letterhead, each part between |,", text)
-                        .orElseThrow())
+                .map(text ->
+                        line("--report-letterhead, each part between |,", text).orElseThrow())
                 .toList();
         if (lines.size() > MOST_LINES) {
-            throw new UsageFault("--report-letterhead has " + lines.size() + " lines; give " + MOST_LINES
-                    + " at the most.");
+            throw new UsageFault(
+                    "--report-letterhead has " + lines.size() + " lines; give " + MOST_LINES + " at the most.");
         }
         return lines;
     }

@@ -3,13 +3,11 @@ package org.seepledger.job;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
-import java.util.Optional;
 import java.util.Set;
 import java.util.stream.IntStream;
 import org.seepledger.balance.Balance;
@@ -23,6 +21,7 @@ import org.seepledger.report.page.Masthead;
 import org.seepledger.report.page.PrismPictures;
 import org.seepledger.report.page.Report;
 import org.seepledger.report.page.ReportPage;
+import org.seepledger.report.page.ReportPictures;
 import org.seepledger.report.page.TableChoice;
 
 /** Puts a report together and writes it. */
@@ -42,7 +41,8 @@ final class ReportFile {
      */
     ReportFile(ReportRequest request, List<Period> periods) {
         this.request = request;
-        this.tables = choice(request.periods(), periods.stream().map(Period::name).toList());
+        this.tables =
+                choice(request.periods(), periods.stream().map(Period::name).toList());
     }
 
     private static TableChoice choice(List<String> wanted, List<String> periods) {
@@ -87,6 +87,10 @@ final class ReportFile {
         List<PrismResult> results = IntStream.range(0, budgets.size())
                 .mapToObj(prism -> PrismResult.of(subject.aquifer(), balance, budgets, prism))
                 .toList();
+        ReportPictures drawing = new ReportPictures(subject.aquifer(), subject.prisms(), balance, units);
+        List<PrismPictures> pictures = IntStream.range(0, results.size())
+                .mapToObj(prism -> drawing.of(prism, results.get(prism)))
+                .toList();
         Report report = new Report(
                 masthead(subject),
                 Version.text(),
@@ -100,8 +104,8 @@ final class ReportFile {
                 statement,
                 subject.notes(),
                 options,
-                Collections.nCopies(results.size(), PrismPictures.NONE),
-                Optional.empty());
+                pictures,
+                drawing.exchange(results.get(0).record().period()));
         Path file = out.file(NAME);
         Files.writeString(file, ReportPage.of(report));
     }

@@ -47,12 +47,6 @@ public record ReportRequest(
      */
     public static ReportRequest dated(LocalDate date) {
         return new ReportRequest(
-                Optional.empty(),
-                Optional.empty(),
-                Optional.empty(),
-                List.of(),
-                date,
-                List.of(RECORD),
-                Amounts.RATE);
+                Optional.empty(), Optional.empty(), Optional.empty(), List.of(), date, List.of(RECORD), Amounts.RATE);
     }
 }

@@ -29,6 +29,7 @@ final class BlockSheet {
     private final double base;
     private final double lowest;
     private final double scale;
+    private final List<Mark> guides = new ArrayList<>();
     private final List<Mark> marks = new ArrayList<>();
     private final List<Mark> list = new ArrayList<>();
     private double listEnd;
@@ -70,7 +71,7 @@ final class BlockSheet {
             middles.add(draw(piece, x, block));
         }
         outline(x, block, y(0), pieces.isEmpty() ? y(0) : y(pieces.get(0).from()));
-        label(index, title, pieces, middles, x + block);
+        label(index, title, pieces, middles, block);
     }
 
     /** Draws what lies between the height of the losses and that of the gains. */
@@ -84,28 +85,19 @@ final class BlockSheet {
             head(2, "Storage", "–");
             middles.add(openBlock(pieces.get(0), x));
         } else {
-            head(
-                    2,
-                    "Storage",
-                    pieces.get(0).name().replace("storage ", "") + " "
-                            + pieces.get(0).figure());
+            head(2, "Storage", pieces.get(0).name().replace("storage ", "") + " " + pieces.get(0).figure());
             middles.add(draw(pieces.get(0), x, storageWidth));
             outline(x, storageWidth, y(pieces.get(0).from()), y(pieces.get(0).to()));
             double beyond = x + storageWidth + 3;
             middles.add(draw(pieces.get(1), beyond, block - storageWidth - 3));
-            outline(
-                    beyond,
-                    block - storageWidth - 3,
-                    y(pieces.get(1).from()),
-                    y(pieces.get(1).to()));
+            outline(beyond, block - storageWidth - 3, y(pieces.get(1).from()), y(pieces.get(1).to()));
         }
-        label(2, "Storage and residual", pieces, middles, x + block);
+        label(2, "Storage and residual", pieces, middles, storageWidth);
         marks.add(line(MARGIN, y(0), width - MARGIN, y(0), Stroke.of(Ink.Token.TEXT, 1)));
     }
 
     private void guide(double from, double to, double level) {
-        marks.add(line(
-                from, y(level), to, y(level), Stroke.of(Ink.Token.MUTED, 0.8).dashed(3.0, 3.0)));
+        guides.add(line(from, y(level), to, y(level), Stroke.of(Ink.Token.MUTED, 0.8).dashed(3.0, 3.0)));
     }
 
     private static Mark.Line line(double fromX, double fromY, double toX, double toY, Stroke stroke) {
@@ -131,7 +123,8 @@ final class BlockSheet {
     private void outline(double x, double wide, double one, double other) {
         if (Math.abs(one - other) >= VISIBLE) {
             Box box = new Box(x, Math.min(one, other), wide, Math.abs(one - other));
-            marks.add(new Mark.Area(List.of(box.ring()), Optional.empty(), Optional.of(Stroke.of(Ink.Token.TEXT, 1))));
+            marks.add(new Mark.Area(
+                    List.of(box.ring()), Optional.empty(), Optional.of(Stroke.of(Ink.Token.TEXT, 1))));
         }
     }
 
@@ -145,15 +138,17 @@ final class BlockSheet {
         return upper + high / 2;
     }
 
-    private void label(int index, String title, List<Block> pieces, List<Double> middles, double x) {
+    private void label(int index, String title, List<Block> pieces, List<Double> middles, double firstWidth) {
         double half = beside ? 14 : 7;
         double[] wanted = middles.stream().mapToDouble(middle -> middle).toArray();
+        double x = left(index) + block;
         double[] places = Spread.out(wanted, 2 * half, top + half - 4, base - half);
         if (!beside && !pieces.isEmpty()) {
             listTitle(title);
         }
         for (int i = 0; i < places.length; i++) {
-            double[] leader = {x + 1, wanted[i], x + 5, wanted[i], x + 11, places[i], x + 14, places[i]};
+            double from = left(index) + (i == 0 ? firstWidth : block) + 1;
+            double[] leader = {from, wanted[i], x + 5, wanted[i], x + 11, places[i], x + 14, places[i]};
             marks.add(new Mark.Line(leader, Stroke.of(Ink.Token.MUTED, 0.8)));
             if (beside) {
                 writeBeside(pieces.get(i), x + 17, places[i], left(index) + column - 4);
@@ -186,7 +181,8 @@ final class BlockSheet {
         list.add(Mark.Text.of(right, listEnd, piece.share(), NAME, Anchor.END).in(Ink.Token.MUTED));
         list.add(Mark.Text.of(right - 54, listEnd, piece.figure(), NAME, Anchor.END));
         double room = right - 60 - Lettering.width(piece.figure(), NAME) - MARGIN - 26;
-        list.add(Mark.Text.of(MARGIN + 26, listEnd, Lettering.fitted(piece.name(), NAME, room), NAME, Anchor.START));
+        list.add(Mark.Text.of(
+                MARGIN + 26, listEnd, Lettering.fitted(piece.name(), NAME, room), NAME, Anchor.START));
     }
 
     /** Adds a paragraph below all else. */
@@ -201,7 +197,8 @@ final class BlockSheet {
     }
 
     List<Mark> marks() {
-        List<Mark> all = new ArrayList<>(marks);
+        List<Mark> all = new ArrayList<>(guides);
+        all.addAll(marks);
         all.addAll(list);
         return all;
     }

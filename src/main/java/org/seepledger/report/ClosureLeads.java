@@ -34,12 +34,14 @@ public final class ClosureLeads {
         addWells(sentences);
         addFlow(sentences);
         if (aquifer.head().isEmpty() && aquifer.layers().stream().anyMatch(layer -> layer.waterTable())) {
-            sentences.add("No heads are given, so that water-table layers count as full; where the flow was computed with a"
-                    + " lower water table, the two do not belong together.");
+            sentences.add(
+                    "No heads are given, so that water-table layers count as full; where the flow was computed with a"
+                            + " lower water table, the two do not belong together.");
         }
         if (aquifer.times().intervals() > 1) {
-            sentences.add("Flow, sources and heads of an interval must belong to the same time: values that are shifted by"
-                    + " an interval leave a residual that changes sign with the seasons.");
+            sentences.add(
+                    "Flow, sources and heads of an interval must belong to the same time: values that are shifted by"
+                            + " an interval leave a residual that changes sign with the seasons.");
         }
         return sentences;
     }
@@ -73,18 +75,21 @@ public final class ClosureLeads {
 
     private void addFlow(List<String> sentences) {
         if (aquifer.flow() instanceof DarcyFlux flux) {
-            sentences.add("Flow is given as specific discharge at cell centres and interpolated to cell faces, which does"
-                    + " not balance at jumps of conductivity or thickness, nor where flow turns within a cell.");
+            sentences.add(
+                    "Flow is given as specific discharge at cell centres and interpolated to cell faces, which does"
+                            + " not balance at jumps of conductivity or thickness, nor where flow turns within a cell.");
             if (flux.outerFaces().top()) {
-                sentences.add("The top of the grid is open to vertical flux: recharge that is also given as a source counts"
-                        + " twice.");
+                sentences.add(
+                        "The top of the grid is open to vertical flux: recharge that is also given as a source counts"
+                                + " twice.");
             }
         } else if (aquifer.flow() instanceof HeadGradient) {
             sentences.add("Flow is worked out from heads and conductivity; it balances as far as whatever computed the"
                     + " heads used the same conductances, saturated thicknesses and instants.");
         } else if (aquifer.flow() instanceof GivenFaceFlow) {
-            sentences.add("Flow is given at cell faces; what does not balance was not balanced there, or stands in a source"
-                    + " or storage term that the set lacks.");
+            sentences.add(
+                    "Flow is given at cell faces; what does not balance was not balanced there, or stands in a source"
+                            + " or storage term that the set lacks.");
         }
     }
 }

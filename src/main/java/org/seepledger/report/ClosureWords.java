@@ -36,8 +36,9 @@ final class ClosureWords {
         List<String> sentences = new ArrayList<>();
         sentences.add(overTheRecord());
         result.worstPeriod()
-                .ifPresent(worst -> sentences.add("Worst period: " + worst.period().name() + ", "
-                        + wording.percent(worst.totals().closureError()) + "."));
+                .ifPresent(
+                        worst -> sentences.add("Worst period: " + worst.period().name() + ", "
+                                + wording.percent(worst.totals().closureError()) + "."));
         return sentences;
     }
 

@@ -45,8 +45,7 @@ final class ExchangeWords {
     private double volume(String giver, String receiver) {
         Period record = result.record().period();
         return result.exchange().stream()
-                .filter(flow ->
-                        flow.giver().equals(giver) && flow.receiver().equals(receiver))
+                .filter(flow -> flow.giver().equals(giver) && flow.receiver().equals(receiver))
                 .mapToDouble(flow -> flow.volume(record))
                 .sum();
     }

@@ -65,8 +65,7 @@ public record PrismResult(
 
     /** {@return whether there are cells whose imbalance is more than rounding, and storage that would excuse it is known} */
     public boolean isWorthLocating() {
-        double throughput =
-                record.totals().throughput() / record.period().duration();
+        double throughput = record.totals().throughput() / record.period().duration();
         return storageKnown()
                 && !whereabouts.largest().isEmpty()
                 && whereabouts.magnitude() > ROUNDING_PERCENT / 100 * throughput;

@@ -61,7 +61,9 @@ public final class StatedOrigins {
     public List<Provenance> of(Term term) {
         if (term.group() == Group.SOURCE) {
             Set<String> from = categories.getOrDefault(term.item(), Set.of(term.item()));
-            return sources.stream().filter(origin -> from.contains(origin.term())).toList();
+            return sources.stream()
+                    .filter(origin -> from.contains(origin.term()))
+                    .toList();
         }
         return term.group() == Group.STORAGE ? storage : flow;
     }

@@ -51,8 +51,8 @@ final class StorageWords {
         if (uptake == 0) {
             return "Over the record nothing changed.";
         }
-        return "Over the record storage " + changed(uptake) + ", which is "
-                + wording.rate(Math.abs(uptake), time) + " on average.";
+        return "Over the record storage " + changed(uptake) + ", which is " + wording.rate(Math.abs(uptake), time)
+                + " on average.";
     }
 
     private String changed(double uptake) {
@@ -80,8 +80,7 @@ final class StorageWords {
         stretches().stream()
                 .filter(stretch -> stretch.uptake() * sign > 0)
                 .max(order)
-                .ifPresent(stretch -> sentences.add(
-                        begin + stretch.name() + ", " + changed(stretch.uptake()) + "."));
+                .ifPresent(stretch -> sentences.add(begin + stretch.name() + ", " + changed(stretch.uptake()) + "."));
     }
 
     private List<Stretch> stretches() {

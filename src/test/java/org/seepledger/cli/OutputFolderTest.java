@@ -172,7 +172,8 @@ class OutputFolderTest {
         succeeded(files.balance());
         succeeded(files.with("layers", "[{'top': 10, 'bottom': 0}]").balance("--overwrite"));
         assertThat(AquiferFiles.names(files.out()))
-                .containsExactly("budget.csv", "exchange.csv", "faces.geojson", "imbalance_l1.tif", "report.html", "run.json");
+                .containsExactly(
+                        "budget.csv", "exchange.csv", "faces.geojson", "imbalance_l1.tif", "report.html", "run.json");
     }
 
     @Test

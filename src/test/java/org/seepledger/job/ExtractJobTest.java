@@ -118,7 +118,7 @@ class ExtractJobTest {
                         true,
                         2,
                         false,
- ReportRequest.dated(LocalDate.of(2024, 5, 31))),
+                        ReportRequest.dated(LocalDate.of(2024, 5, 31))),
                 Progress.NONE);
         return Rows.text(out.resolve("budget.csv"));
     }

@@ -77,7 +77,7 @@ class TraceJobTest {
                         true,
                         1,
                         false,
- ReportRequest.dated(LocalDate.of(2024, 5, 31))),
+                        ReportRequest.dated(LocalDate.of(2024, 5, 31))),
                 Progress.NONE);
         int traced = 0;
         for (CSVRecord row : Rows.of(folder.resolve("budget/budget.csv"))) {

@@ -107,7 +107,7 @@ class ValleyBalanceTest {
                 false,
                 1,
                 false,
- ReportRequest.dated(LocalDate.of(2024, 5, 31)));
+                ReportRequest.dated(LocalDate.of(2024, 5, 31)));
         BalanceOutcome outcome = BalanceJob.run(request, Progress.NONE);
         // In percent: a hundred times stricter than 1e-8 of throughput.
         assertThat(outcome.worstClosureError()).isLessThan(1e-8);

@@ -8,8 +8,8 @@ import static j2html.TagCreator.summary;
 import static j2html.TagCreator.table;
 import static j2html.TagCreator.tbody;
 import static j2html.TagCreator.text;
-import static j2html.TagCreator.thead;
 import static j2html.TagCreator.th;
+import static j2html.TagCreator.thead;
 import static j2html.TagCreator.tr;
 
 import j2html.tags.DomContent;
@@ -62,9 +62,7 @@ final class BudgetTable {
             }
         }
         bodies.add(totals());
-        return div(
-                Cells.scrolling(title, framed(title, bodies)),
-                folded.isEmpty() ? text("") : fold(folded));
+        return div(Cells.scrolling(title, framed(title, bodies)), folded.isEmpty() ? text("") : fold(folded));
     }
 
     private String amounts() {
@@ -88,7 +86,8 @@ final class BudgetTable {
 
     private DomContent body(Group group, List<Term> terms, List<Term> folded) {
         List<DomContent> lines = new ArrayList<>();
-        lines.add(tr(th(name(group)).attr("scope", "rowgroup").attr("colspan", COLUMNS)).withClass("group"));
+        lines.add(tr(th(name(group)).attr("scope", "rowgroup").attr("colspan", COLUMNS))
+                .withClass("group"));
         terms.stream().filter(term -> !folded.contains(term)).forEach(term -> lines.addAll(rows.of(term)));
         if (!folded.isEmpty()) {
             lines.add(rows.sum(Wording.counted(folded.size(), "smaller side") + ", below", folded, "folded"));
@@ -111,7 +110,8 @@ final class BudgetTable {
 
     private DomContent totals() {
         List<DomContent> lines = new ArrayList<>();
-        lines.add(tr(th(name(Group.TOTAL)).attr("scope", "rowgroup").attr("colspan", COLUMNS)).withClass("group"));
+        lines.add(tr(th(name(Group.TOTAL)).attr("scope", "rowgroup").attr("colspan", COLUMNS))
+                .withClass("group"));
         boolean known = !Double.isNaN(budget.totals().storageChange());
         Total.rows(known).forEach(total -> lines.add(rows.of(total)));
         return tbody(lines.toArray(DomContent[]::new)).withClass("totals");
@@ -132,9 +132,8 @@ final class BudgetTable {
 
     private DomContent fold(List<Term> folded) {
         String title = prism + ": " + budget.period().name() + ", the smaller sides, " + amounts();
-        DomContent body = tbody(folded.stream()
-                .flatMap(term -> rows.of(term).stream())
-                .toArray(DomContent[]::new));
+        DomContent body =
+                tbody(folded.stream().flatMap(term -> rows.of(term).stream()).toArray(DomContent[]::new));
         return details(
                 summary(Wording.counted(folded.size(), "smaller side")),
                 Cells.scrolling(title, framed(title, Stream.of(body).toList())));

@@ -35,8 +35,8 @@ final class ExchangeSection {
     }
 
     private static DomContent flows(Report report) {
-        String title = "Exchange: record, "
-                + (report.amounts() == Amounts.RATE ? "mean rates in " : "volumes in ") + report.amountUnit();
+        String title = "Exchange: record, " + (report.amounts() == Amounts.RATE ? "mean rates in " : "volumes in ")
+                + report.amountUnit();
         List<ExchangeFlow> flows = report.exchange().stream()
                 .filter(flow -> flow.volume(report.record()) != 0)
                 .toList();
@@ -46,8 +46,7 @@ final class ExchangeSection {
                         title,
                         table(
                                         caption(title),
-                                        thead(tr(
-                                                Cells.column("From"), Cells.column("To"), Cells.numberColumn("Flow"))),
+                                        thead(tr(Cells.column("From"), Cells.column("To"), Cells.numberColumn("Flow"))),
                                         tbody(each(flows, flow -> row(report, flow))))
                                 .withClass("exchange"));
     }

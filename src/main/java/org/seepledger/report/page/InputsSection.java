@@ -34,17 +34,15 @@ final class InputsSection {
                 title,
                 table(
                                 caption(title),
-                                thead(tr(
-                                        Cells.column("File"), Cells.numberColumn("Bytes"), Cells.column("SHA-256"))),
+                                thead(tr(Cells.column("File"), Cells.numberColumn("Bytes"), Cells.column("SHA-256"))),
                                 tbody(each(inputs, InputsSection::row)))
                         .withClass("files"));
         return section(
                         h2("Inputs"),
-                        p("Whoever has files with these hashes, and the same version of the program and options, gets the"
-                                + " same digits."),
-                        inputs.size() > FILES_SHOWN
-                                ? details(summary(inputs.size() + " input files"), files)
-                                : files)
+                        p(
+                                "Whoever has files with these hashes, and the same version of the program and options, gets the"
+                                        + " same digits."),
+                        inputs.size() > FILES_SHOWN ? details(summary(inputs.size() + " input files"), files) : files)
                 .withId("inputs");
     }
 
@@ -59,9 +57,10 @@ final class InputsSection {
         String title = "Where terms come from, as the set states";
         return section(
                         h2("Origins and uncertainties"),
-                        p("What is stated of flow holds for all sides and lids. A standard deviation in percent is taken of"
-                                + " the larger of a term's gross inflow and outflow; an absolute one is in the unit of the"
-                                + " data, and is not set against a term."),
+                        p(
+                                "What is stated of flow holds for all sides and lids. A standard deviation in percent is taken of"
+                                        + " the larger of a term's gross inflow and outflow; an absolute one is in the unit of the"
+                                        + " data, and is not set against a term."),
                         Cells.scrolling(
                                 title,
                                 table(

@@ -25,19 +25,19 @@ final class MethodSection {
                         p("Flow was given as " + report.aquifer().flow().given() + "."),
                         p(Statement.METHOD),
                         p(Statement.SIGNS),
-                        p("Throughput is the larger of all gains and all losses, gross, storage among them. The net closure"
-                                + " error sets the residual against the larger sum of the items' net gains or net losses,"
-                                + " an item's net taken over all layers."),
-                        p("Rates are means over a period, volumes totals. What flows in during one interval and out in the"
-                                + " next counts under both in a period that holds the two. Tables show four significant"
-                                + " digits; budget.csv has all of them."),
+                        p(
+                                "Throughput is the larger of all gains and all losses, gross, storage among them. The net closure"
+                                        + " error sets the residual against the larger sum of the items' net gains or net losses,"
+                                        + " an item's net taken over all layers."),
+                        p(
+                                "Rates are means over a period, volumes totals. What flows in during one interval and out in the"
+                                        + " next counts under both in a period that holds the two. Tables show four significant"
+                                        + " digits; budget.csv has all of them."),
                         p("Faces, sources and storage are booked twice by different routes, face by face and as the"
                                 + " imbalance of the cells inside; the run ends without result unless the two agree to"
                                 + " rounding."),
                         h3("Options of the run"),
-                        dl(each(
-                                        report.options(),
-                                        (name, value) -> div(dt(code(name)), dd(code(value)))))
+                        dl(each(report.options(), (name, value) -> div(dt(code(name)), dd(code(value)))))
                                 .withClass("facts options"))
                 .withId("method");
     }

@@ -58,10 +58,9 @@ final class PeriodsSection {
         for (Total total : totals) {
             double value = budget.totals().get(total);
             cells.add(
-                    total.isPercentage()
-                            ? Cells.percent(value)
-                            : Cells.number(report.amount(value, budget.period())));
+                    total.isPercentage() ? Cells.percent(value) : Cells.number(report.amount(value, budget.period())));
         }
-        return tr(cells.toArray(DomContent[]::new)).withData("period", budget.period().name());
+        return tr(cells.toArray(DomContent[]::new))
+                .withData("period", budget.period().name());
     }
 }

@@ -23,10 +23,5 @@ public record PrismPictures(
 
     /** No pictures. */
     public static final PrismPictures NONE = new PrismPictures(
-            Optional.empty(),
-            Optional.empty(),
-            Optional.empty(),
-            Optional.empty(),
-            Optional.empty(),
-            Optional.empty());
+            Optional.empty(), Optional.empty(), Optional.empty(), Optional.empty(), Optional.empty(), Optional.empty());
 }

@@ -87,8 +87,6 @@ public record Report(
     }
 
     private String time(double time) {
-        return aquifer.times()
-                .isoDate(time)
-                .orElseGet(() -> wording().number(time) + " " + aquifer.timeUnit());
+        return aquifer.times().isoDate(time).orElseGet(() -> wording().number(time) + " " + aquifer.timeUnit());
     }
 }

@@ -7,7 +7,6 @@ import static j2html.TagCreator.document;
 import static j2html.TagCreator.each;
 import static j2html.TagCreator.footer;
 import static j2html.TagCreator.h2;
-
 import static j2html.TagCreator.html;
 import static j2html.TagCreator.main;
 import static j2html.TagCreator.meta;
@@ -45,9 +44,7 @@ public final class ReportPage {
                                 a("Skip to the answer").withHref("#answer").withClass("skip"),
                                 rawHtml(SvgWriter.textures()),
                                 TitleBlock.of(report),
-                                aside(disclaimer())
-                                        .withClass("disclaimer")
-                                        .attr("aria-label", "Disclaimer"),
+                                aside(disclaimer()).withClass("disclaimer").attr("aria-label", "Disclaimer"),
                                 TitleBlock.contents(report),
                                 main(content(report)),
                                 footer(h2("Disclaimer"), disclaimer())

@@ -32,6 +32,7 @@ public record TableChoice(boolean record, boolean worst, boolean all, Set<String
     private boolean isChosen(PeriodBudget budget, PrismResult result) {
         boolean isRecord = budget.period().equals(result.record().period());
         boolean isWorst = worst && result.worstPeriod().filter(budget::equals).isPresent();
-        return !(isRecord && record) && (all || isWorst || names.contains(budget.period().name()));
+        return !(isRecord && record)
+                && (all || isWorst || names.contains(budget.period().name()));
     }
 }

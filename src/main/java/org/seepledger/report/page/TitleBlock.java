@@ -31,7 +31,8 @@ final class TitleBlock {
         return header(
                         iff(
                                 !masthead.letterhead().isEmpty(),
-                                div(each(masthead.letterhead(), line -> p(line))).withClass("letterhead")),
+                                div(each(masthead.letterhead(), line -> p(line)))
+                                        .withClass("letterhead")),
                         h1(masthead.title()),
                         dl(facts(report).toArray(DomContent[]::new)).withClass("facts"))
                 .withClass("title-block");
@@ -75,7 +76,8 @@ final class TitleBlock {
         }
         links.add(link("#answer", "The answer"));
         for (int prism = 0; prism < report.results().size(); prism++) {
-            links.add(link("#" + PrismSection.id(prism), report.results().get(prism).prism()));
+            links.add(link(
+                    "#" + PrismSection.id(prism), report.results().get(prism).prism()));
         }
         links.add(link("#exchange", "Exchange"));
         links.add(link("#periods", "Periods"));
