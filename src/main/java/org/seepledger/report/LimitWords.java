@@ -3,6 +3,7 @@ package org.seepledger.report;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
+import org.seepledger.ledger.Group;
 import org.seepledger.ledger.Totals;
 
 /** What a budget cannot carry, in words: terms that drown in the residual or in their own uncertainty, and what closure does not show. */
@@ -44,7 +45,7 @@ final class LimitWords {
 
     private void addNotGiven(List<String> sentences) {
         List<String> names = terms.stream()
-                .filter(term -> !term.quantified())
+                .filter(term -> !term.quantified() && (result.storageKnown() || term.group() != Group.STORAGE))
                 .map(Term::name)
                 .toList();
         if (!names.isEmpty()) {
@@ -90,9 +91,11 @@ final class LimitWords {
     }
 
     private void addCombined(List<String> sentences) {
-        List<Term> flowing = terms.stream().filter(term -> term.gross() > 0).toList();
-        List<Term> stating =
-                flowing.stream().filter(term -> !Double.isNaN(deviation(term))).toList();
+        List<Term> flowing =
+                terms.stream().filter(term -> term.gross() > 0).toList();
+        List<Term> stating = flowing.stream()
+                .filter(term -> !Double.isNaN(deviation(term)))
+                .toList();
         List<String> silent = flowing.stream()
                 .filter(term -> !stating.contains(term))
                 .map(Term::name)
@@ -125,8 +128,8 @@ final class LimitWords {
         List<String> names =
                 terms.stream().filter(origins::byDifference).map(Term::name).toList();
         if (!names.isEmpty()) {
-            sentences.add(
-                    "Computed by difference, so that closure is no evidence for it: " + Wording.listed(names) + ".");
+            sentences.add("Computed by difference, so that closure is no evidence for it: " + Wording.listed(names)
+                    + ".");
         }
     }
 }
