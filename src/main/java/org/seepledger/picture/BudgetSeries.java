@@ -134,7 +134,7 @@ public final class BudgetSeries {
     }
 
     private String aboutResidual() {
-        String name = values.storageKnown() ? "residual" : "not explained, storage included";
+        String name = values.storageKnown() ? "residual" : "gains − losses";
         return values.closes()
                 ? name + ": rounding alone, at most " + Figures.typeset(values.largestResidual()) + " " + unit.words()
                 : name + ", on a scale of its own";
@@ -195,7 +195,7 @@ public final class BudgetSeries {
                         + budgets.get(budgets.size() - 1).period().name() + ", in " + unit.words();
         return span + ": gains " + range(values.gains()) + ", losses " + range(values.losses()) + ", change in storage "
                 + range(values.storage()) + ", "
-                + (values.storageKnown() ? "residual " : "not explained, storage included, ")
+                + (values.storageKnown() ? "residual " : "gains − losses ")
                 + range(values.residual()) + ".";
     }
 

@@ -80,7 +80,7 @@ public final class ExchangeDiagram {
                 .filter(Double::isFinite)
                 .max()
                 .orElse(1);
-        ExchangeSheet sheet = new ExchangeSheet(width, WIDEST / largest, unit.words());
+        ExchangeSheet sheet = new ExchangeSheet(width, WIDEST / largest, unit.words(), flows);
         double y = sheet.top();
         for (int row = 0; row < prisms.size(); row++) {
             y = sheet.node(prisms.get(row), row, flows, y) + ROW_GAP;

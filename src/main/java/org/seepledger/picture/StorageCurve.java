@@ -107,7 +107,7 @@ public final class StorageCurve {
             key.filled(new Fill(Ink.Token.STORAGE, 1, Texture.DOTS), "taken by storage, " + last(storage));
             key.line(residualStroke(), "residual, " + last(residual));
         } else {
-            key.line(residualStroke(), "not explained, storage included, " + last(residual));
+            key.line(residualStroke(), "gains − losses, " + last(residual));
         }
         return key.end();
     }
@@ -152,10 +152,10 @@ public final class StorageCurve {
                         + " periods, since no number can be given for the next."
                 : "";
         if (!storageKnown) {
-            return "Storage is not known; what is not explained, storage included, has come to " + last(residual) + "."
+            return "Storage is not known; gains − losses, " + last(residual) + "."
                     + covered;
         }
-        return "Storage has taken " + last(storage) + "; between, from "
+        return "Storage has taken, " + last(storage) + "; in between, from "
                 + Figures.typeset(values(storage).min().orElse(0)) + " to "
                 + Figures.typeset(values(storage).max().orElse(0)) + ". The residual has come to "
                 + last(residual).replace("in the end ", "") + "." + covered;
