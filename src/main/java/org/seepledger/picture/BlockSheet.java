@@ -157,7 +157,8 @@ final class BlockSheet {
         }
         for (int i = 0; i < places.length; i++) {
             Drawn one = drawn.get(i);
-            double[] leader = {one.x() + 1, one.y(), x + 5, one.y(), x + 11, places[i], x + 14, places[i]};
+            double from = one.x() < x - 1 ? dot(one) : one.x() + 1;
+            double[] leader = {from, one.y(), x + 5, one.y(), x + 11, places[i], x + 14, places[i]};
             marks.add(new Mark.Line(leader, Stroke.of(Ink.Token.MUTED, 0.8)));
             if (beside) {
                 writeBeside(one.piece(), x + 17, places[i], left(index) + column - 4);
@@ -165,6 +166,14 @@ final class BlockSheet {
                 writeKey(one.piece(), x + 16, places[i]);
             }
         }
+    }
+
+    /** Marks where a leader begins that passes over another piece. */
+    private double dot(Drawn one) {
+        double x = one.x() - 6;
+        Box dot = new Box(x - 2, one.y() - 2, 4, 4);
+        marks.add(Mark.Area.of(dot, Fill.of(Ink.Token.TEXT)));
+        return x;
     }
 
     private void writeBeside(Block piece, double x, double middle, double right) {

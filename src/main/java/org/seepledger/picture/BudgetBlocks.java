@@ -55,7 +55,7 @@ public final class BudgetBlocks {
      * @param budget its budget in a period
      * @param flows which flows of an item are shown
      * @param unit the unit to show
-     * @param width in logical pixels, at least 300
+     * @param width in logical pixels, at least 340
      */
     public static Picture of(String prism, PeriodBudget budget, Flows flows, UnitShown unit, double width) {
         return new BudgetBlocks(prism, budget, flows, unit).picture(width);

@@ -78,7 +78,7 @@ public final class BudgetSeries {
      * @param times the record's instants, for dates
      * @param unit the unit to show
      * @param marked the period to mark, if any
-     * @param width in logical pixels, at least 300
+     * @param width in logical pixels, at least 340
      */
     public static BudgetSeries of(
             String prism, List<PeriodBudget> budgets, Times times, UnitShown unit, OptionalInt marked, double width) {

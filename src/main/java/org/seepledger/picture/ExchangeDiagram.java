@@ -67,7 +67,7 @@ public final class ExchangeDiagram {
      * @param flows what they give to each other and to the outside
      * @param period the period
      * @param unit the unit to show
-     * @param width in logical pixels, at least 320
+     * @param width in logical pixels, at least 340
      */
     public static Picture of(
             List<String> prisms, List<ExchangeFlow> flows, Period period, UnitShown unit, double width) {

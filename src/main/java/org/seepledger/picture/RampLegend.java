@@ -38,7 +38,7 @@ public final class RampLegend {
         legend.marks.add(title(words, place));
         legend.strip(strip, new double[] {strip.width() / COLOURS, 0, 0, STRIP, strip.x(), strip.y()}, false);
         Labels labels = new Labels(new Box(place.x() - 1, strip.bottom(), place.width() + 2, 30));
-        Ticks ticks = scale.ticks(Math.max(3, (int) (place.width() / 50)));
+        Ticks ticks = levelTicks(scale, place.width());
         for (int i = 0; i < ticks.count(); i++) {
             double x = strip.x() + scale.share(ticks.values().get(i)) * strip.width();
             double half = Lettering.width(ticks.label(i), SIZE) / 2;
@@ -72,6 +72,20 @@ public final class RampLegend {
             legend.marks.add(Mark.Text.of(x, y + 0.35 * SIZE, ticks.label(i), SIZE, Anchor.START));
         }
         return legend.marks;
+    }
+
+    /** {@return as many ticks as have room for their labels} */
+    private static Ticks levelTicks(ValueScale scale, double length) {
+        Ticks best = scale.ticks(3);
+        for (int most = 4; most <= 12; most++) {
+            Ticks finer = scale.ticks(most);
+            double room = 0;
+            for (int i = 0; i < finer.count(); i++) {
+                room += Lettering.width(finer.label(i), SIZE) + SIZE;
+            }
+            best = room <= length ? finer : best;
+        }
+        return best;
     }
 
     /**
