@@ -85,7 +85,7 @@ public final class BudgetSeries {
      * @param times the record's instants, for dates
      * @param unit the unit to show
      * @param marked the period to mark, if any
-     * @param width in logical pixels, at least 300
+     * @param width in logical pixels, at least 340
      */
     public static BudgetSeries of(
             String prism, List<PeriodBudget> budgets, Times times, UnitShown unit, OptionalInt marked, double width) {
@@ -141,7 +141,7 @@ public final class BudgetSeries {
     }
 
     private String aboutResidual() {
-        String name = values.storageKnown() ? "residual" : "not explained, storage included";
+        String name = values.storageKnown() ? "residual" : "gains − losses";
         return values.closes()
                 ? name + ": rounding alone, at most " + Figures.typeset(values.largestResidual()) + " " + unit.words()
                 : name + ", on a scale of its own";
@@ -203,7 +203,7 @@ public final class BudgetSeries {
                         + budgets.get(budgets.size() - 1).period().name() + ", in " + unit.words();
         return span + ": gains " + range(values.gains()) + ", losses " + range(values.losses()) + ", change in storage "
                 + range(values.storage()) + ", "
-                + (values.storageKnown() ? "residual " : "not explained, storage included, ")
+                + (values.storageKnown() ? "residual " : "gains − losses ")
                 + range(values.residual()) + ".";
     }
 
