@@ -91,11 +91,9 @@ final class LimitWords {
     }
 
     private void addCombined(List<String> sentences) {
-        List<Term> flowing =
-                terms.stream().filter(term -> term.gross() > 0).toList();
-        List<Term> stating = flowing.stream()
-                .filter(term -> !Double.isNaN(deviation(term)))
-                .toList();
+        List<Term> flowing = terms.stream().filter(term -> term.gross() > 0).toList();
+        List<Term> stating =
+                flowing.stream().filter(term -> !Double.isNaN(deviation(term))).toList();
         List<String> silent = flowing.stream()
                 .filter(term -> !stating.contains(term))
                 .map(Term::name)
@@ -128,8 +126,8 @@ final class LimitWords {
         List<String> names =
                 terms.stream().filter(origins::byDifference).map(Term::name).toList();
         if (!names.isEmpty()) {
-            sentences.add("Computed by difference, so that closure is no evidence for it: " + Wording.listed(names)
-                    + ".");
+            sentences.add(
+                    "Computed by difference, so that closure is no evidence for it: " + Wording.listed(names) + ".");
         }
     }
 }

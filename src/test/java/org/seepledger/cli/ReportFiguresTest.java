@@ -69,7 +69,8 @@ class ReportFiguresTest {
             found += period.equals("record") && tables > 4 ? 0 : 1;
             for (Element row : ReportHtml.within(table, "tr")) {
                 String layer = row.getAttribute("data-layer");
-                String key = String.join("/", prism, period, row.getAttribute("data-group"), row.getAttribute("data-item"));
+                String key =
+                        String.join("/", prism, period, row.getAttribute("data-group"), row.getAttribute("data-item"));
                 if (!layer.isEmpty() && !(period.equals("record") && tables > 4)) {
                     shown.add(key + "/" + layer);
                     assertRow(row, csv(budget, key + "/" + layer), amounts);
@@ -82,7 +83,9 @@ class ReportFiguresTest {
         assertThat(budget.rows()).allSatisfy(row -> {
             String item = String.join("/", row.get("prism"), row.get("period"), row.get("group"), row.get("item"));
             boolean idle = shown.contains(item + "/idle");
-            assertThat(idle || shown.contains(item + "/" + row.get("layer"))).as(item).isTrue();
+            assertThat(idle || shown.contains(item + "/" + row.get("layer")))
+                    .as(item)
+                    .isTrue();
             if (idle) {
                 assertThat(row.get("inflow_rate") + row.get("outflow_rate")).isEqualTo("0.00.0");
             }
@@ -130,10 +133,13 @@ class ReportFiguresTest {
                 double layers = 0;
                 for (Element row : ReportHtml.within(body, "tr")) {
                     String style = row.getAttribute("class");
-                    double inflow = ReportHtml.cells(row).isEmpty() ? 0 : ReportHtml.number(ReportHtml.cells(row).get(0));
+                    double inflow = ReportHtml.cells(row).isEmpty()
+                            ? 0
+                            : ReportHtml.number(ReportHtml.cells(row).get(0));
                     boolean item = style.equals("item") || style.isEmpty() && row.hasAttribute("data-layer");
                     items += item && !row.getAttribute("data-group").equals("total") ? inflow : 0;
-                    layers += row.hasAttribute("data-layer") && !row.getAttribute("data-group").equals("total")
+                    layers += row.hasAttribute("data-layer")
+                                    && !row.getAttribute("data-group").equals("total")
                             ? inflow
                             : 0;
                     if (style.equals("sum")) {
@@ -173,7 +179,8 @@ class ReportFiguresTest {
     @Test
     void exchangeIsThatOfTheTable() throws IOException {
         List<CSVRecord> flows;
-        CSVFormat format = CSVFormat.RFC4180.builder().setCommentMarker('#').setHeader().get();
+        CSVFormat format =
+                CSVFormat.RFC4180.builder().setCommentMarker('#').setHeader().get();
         try (CSVParser parser = CSVParser.parse(Files.readString(whole.resolve("exchange.csv")), format)) {
             flows = parser.getRecords().stream()
                     .filter(row -> !row.get("flow_volume").equals("0.0"))
@@ -184,8 +191,10 @@ class ReportFiguresTest {
                 .toList();
         assertThat(rows).hasSameSizeAs(flows).hasSizeGreaterThan(8);
         for (int i = 0; i < rows.size(); i++) {
-            assertThat(rows.get(i).getAttribute("data-giver")).isEqualTo(flows.get(i).get("giver"));
-            assertThat(rows.get(i).getAttribute("data-receiver")).isEqualTo(flows.get(i).get("receiver"));
+            assertThat(rows.get(i).getAttribute("data-giver"))
+                    .isEqualTo(flows.get(i).get("giver"));
+            assertThat(rows.get(i).getAttribute("data-receiver"))
+                    .isEqualTo(flows.get(i).get("receiver"));
             assertCell(ReportHtml.cells(rows.get(i)).get(1), flows.get(i).get("flow_volume"), false);
         }
     }

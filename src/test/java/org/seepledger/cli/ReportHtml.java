@@ -49,7 +49,8 @@ record ReportHtml(Path file, Document page) {
     /** All elements that have a class. */
     List<Element> ofClass(String name) {
         return all("*").stream()
-                .filter(element -> List.of(element.getAttribute("class").split(" ")).contains(name))
+                .filter(element ->
+                        List.of(element.getAttribute("class").split(" ")).contains(name))
                 .toList();
     }
 

@@ -69,16 +69,13 @@ class ReportPageTest {
     @ParameterizedTest
     @ValueSource(strings = {"hostile", "transient", "many sides", "overlapping"})
     void isValidHtml(String which) throws Exception {
-        AquiferFiles files =
-                switch (which) {
-                    case "hostile" -> hostile();
-                    case "transient" -> transientOne();
-                    case "many sides" -> manySides(100);
-                    default ->
-                        new AquiferFiles(folder)
-                                .prism("a", "", AquiferFiles.BLOCK)
-                                .prism("b", "", AquiferFiles.BLOCK);
-                };
+        AquiferFiles files = switch (which) {
+            case "hostile" -> hostile();
+            case "transient" -> transientOne();
+            case "many sides" -> manySides(100);
+            default ->
+                new AquiferFiles(folder).prism("a", "", AquiferFiles.BLOCK).prism("b", "", AquiferFiles.BLOCK);
+        };
         ReportHtml report = report(files, "--report-author", HOSTILE, "--report-title", HOSTILE);
         EmbeddedValidator validator = new EmbeddedValidator();
         validator.setOutputFormat(EmbeddedValidator.OutputFormat.JSON);
@@ -96,7 +93,8 @@ class ReportPageTest {
     @Test
     void loadsNothingAndRunsNothing() throws IOException {
         ReportHtml report = report(transientOne());
-        for (String element : List.of("script", "link", "iframe", "object", "embed", "img", "base", "form", "audio", "video")) {
+        for (String element :
+                List.of("script", "link", "iframe", "object", "embed", "img", "base", "form", "audio", "video")) {
             assertThat(report.all(element)).as(element).isEmpty();
         }
         for (Element element : report.all("*")) {
@@ -105,7 +103,9 @@ class ReportPageTest {
                 String name = attribute.getName().toLowerCase(Locale.ROOT);
                 assertThat(name).doesNotStartWith("on");
                 if (FETCHING.contains(name)) {
-                    assertThat(attribute.getValue()).as(element.getTagName() + " " + name).matches("#.+|data:image/png;.+");
+                    assertThat(attribute.getValue())
+                            .as(element.getTagName() + " " + name)
+                            .matches("#.+|data:image/png;.+");
                 }
             }
         }
@@ -152,7 +152,8 @@ class ReportPageTest {
             assertThat(cell.getTextContent()).isEqualTo("–");
             assertThat(ReportHtml.within(cell, "data")).isEmpty();
         });
-        assertThat(ReportHtml.cells(row(table, "residual", "*")).get(0).getTextContent()).isEqualTo("–");
+        assertThat(ReportHtml.cells(row(table, "residual", "*")).get(0).getTextContent())
+                .isEqualTo("–");
         assertThat(ReportHtml.text(report.byId("answer")))
                 .contains("Closure cannot be judged", "No flow can be given for side 1 and side 4");
         assertThat(ReportHtml.text(report.byId("warnings"))).contains("Change in storage is not known");
@@ -214,7 +215,8 @@ class ReportPageTest {
         }
         assertThat(ReportHtml.text(report.page().getDocumentElement()))
                 .as("the disclaimer stands at the beginning and at the end")
-                .containsSubsequence("not a determination of compliance", "The answer", "not a determination of compliance");
+                .containsSubsequence(
+                        "not a determination of compliance", "The answer", "not a determination of compliance");
     }
 
     @Test
@@ -242,7 +244,8 @@ class ReportPageTest {
         assertThat(report.ofClass("budget"))
                 .extracting(table -> table.getAttribute("data-period"))
                 .containsExactly("interval 2");
-        assertThat(ReportHtml.text(ReportHtml.within(report.ofClass("budget").get(0), "caption").get(0)))
+        assertThat(ReportHtml.text(ReportHtml.within(report.ofClass("budget").get(0), "caption")
+                        .get(0)))
                 .isEqualTo("block: interval 2, volumes in m³");
     }
 
@@ -282,7 +285,12 @@ class ReportPageTest {
     void isTheSameEachTimeAndHasTheDateOfTheClock() throws IOException {
         AquiferFiles files = transientOne().write();
         String[] command = {
-            "balance", files.aquifer().toString(), "--prisms", files.prisms().toString(), "--overwrite", "--out",
+            "balance",
+            files.aquifer().toString(),
+            "--prisms",
+            files.prisms().toString(),
+            "--overwrite",
+            "--out",
             files.out().toString()
         };
         Clock clock = Clock.fixed(Instant.parse("2025-02-03T12:00:00Z"), ZoneOffset.UTC);

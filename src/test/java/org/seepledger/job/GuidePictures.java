@@ -51,7 +51,10 @@ public final class GuidePictures {
         write(folder, "storage", field.storage());
         write(folder, "section", valley.of("south terrace").section());
         write(folder, "exchange", valley.exchange());
-        write(folder, "imbalance", drawn("terrace", Periods.Every.RECORD).of("well field").imbalance());
+        write(
+                folder,
+                "imbalance",
+                drawn("terrace", Periods.Every.RECORD).of("well field").imbalance());
     }
 
     private static void write(Path folder, String name, Optional<Picture> picture) throws IOException {
@@ -61,8 +64,7 @@ public final class GuidePictures {
     private static Drawn drawn(String sample, Periods.Every every) {
         Path folder = SAMPLES.resolve(sample);
         try (Subject subject = Subject.open(folder, folder.resolve("prisms.geojson"), false)) {
-            Balance balance =
-                    WaterBalance.of(subject.aquifer(), subject.prisms(), WellRule.POINT, 1, Progress.NONE);
+            Balance balance = WaterBalance.of(subject.aquifer(), subject.prisms(), WellRule.POINT, 1, Progress.NONE);
             List<Period> periods = subject.periods(every, Optional.empty(), 10);
             List<PrismBudget> budgets = balance.ledgers().stream()
                     .map(ledger -> new PrismBudget(

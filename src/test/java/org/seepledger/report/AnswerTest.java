@@ -72,8 +72,8 @@ class AnswerTest {
         List<PeriodBudget> periods = new ArrayList<>();
         for (int i = 0; i < intervals; i++) {
             parts.add(new Period.Part(i, 10));
-            periods.add(ledger.budget(new Period(
-                    "interval " + (i + 1), 10 * i, 10 * i + 10, List.of(new Period.Part(i, 10)))));
+            periods.add(ledger.budget(
+                    new Period("interval " + (i + 1), 10 * i, 10 * i + 10, List.of(new Period.Part(i, 10)))));
         }
         PrismResult result = new PrismResult(
                 "meadow",
@@ -82,8 +82,8 @@ class AnswerTest {
                 periods,
                 exchange,
                 new Whereabouts("meadow", 0, List.of()));
-        Aquifer aquifer = new Aquifer(
-                "test", null, List.of(), null, null, Optional.empty(), Storage.NONE, sources, null, null);
+        Aquifer aquifer =
+                new Aquifer("test", null, List.of(), null, null, Optional.empty(), Storage.NONE, sources, null, null);
         return Answer.of(result, StatedOrigins.of(aquifer, origins), Wording.plain(UNITS))
                 .on(topic)
                 .toList();
@@ -124,8 +124,9 @@ class AnswerTest {
                 .row(Group.SIDE, "side 2", 0, 70)
                 .row(Group.STORAGE, "water-table storage", false, 0, 0);
         assertThat(says(Topic.CLOSURE))
-                .containsExactly("Closure cannot be judged: change in storage is not known. Inflow less outflow, storage"
-                        + " included, is 30 m3/d.");
+                .containsExactly(
+                        "Closure cannot be judged: change in storage is not known. Inflow less outflow, storage"
+                                + " included, is 30 m3/d.");
         assertThat(says(Topic.STORAGE)).containsExactly("It is not known: heads or storage coefficients are missing.");
         assertThat(says(Topic.LIMITS)).noneMatch(sentence -> sentence.contains("clos"));
     }
@@ -180,17 +181,16 @@ class AnswerTest {
                 .row(Group.LID, "bottom", 0, 2)
                 .row(Group.SIDE, "side 3", 0, 0);
         assertThat(says(Topic.LIMITS))
-                .contains("Smaller than what is unexplained (5 m3/d), so that the budget neither supports nor contradicts"
-                        + " them: bottom lid (2 m3/d).");
+                .contains(
+                        "Smaller than what is unexplained (5 m3/d), so that the budget neither supports nor contradicts"
+                                + " them: bottom lid (2 m3/d).");
     }
 
     @Test
     void termsBelowTheirOwnUncertaintyAreNamedWithTheirNumbers() {
         origins.set(0, new Provenance("flow", "simulated", "", "20 %"));
         origins.add(new Provenance("rain", "estimated", "", "10 %"));
-        row(Group.SIDE, "side 1", 100, 90)
-                .row(Group.SIDE, "side 2", 0, 60)
-                .row(Group.SOURCE, "rain", 50, 0);
+        row(Group.SIDE, "side 1", 100, 90).row(Group.SIDE, "side 2", 0, 60).row(Group.SOURCE, "rain", 50, 0);
         assertThat(says(Topic.LIMITS))
                 .contains(
                         "Net flow smaller than one stated standard deviation of the gross flow, so that not even its"
@@ -205,8 +205,9 @@ class AnswerTest {
         origins.set(0, new Provenance("flow", "", "", "1 %"));
         row(Group.SIDE, "side 1", 100, 0).row(Group.SIDE, "side 2", 0, 80);
         assertThat(says(Topic.LIMITS))
-                .anyMatch(sentence -> sentence.endsWith(
-                        "What is unexplained is more than that: errors are larger than stated, or something is missing."));
+                .anyMatch(
+                        sentence -> sentence.endsWith(
+                                "What is unexplained is more than that: errors are larger than stated, or something is missing."));
     }
 
     @Test

@@ -103,7 +103,8 @@ final class ClosureSection {
 
     private DomContent leads() {
         return div(
-                p("What the program knows of this set that can leave a residual. These are leads to follow, not findings:"),
+                p(
+                        "What the program knows of this set that can leave a residual. These are leads to follow, not findings:"),
                 ul(each(ClosureLeads.of(report.aquifer(), result), lead -> li(lead))));
     }
 }
