@@ -75,8 +75,7 @@ public final class BudgetBlocks {
         return new Picture(
                 width,
                 sheet.height(),
-                "Gains, losses and storage of " + prism + ", "
-                        + budget.period().name(),
+                "Gains, losses and storage of " + prism + ", " + budget.period().name(),
                 description(),
                 sheet.marks());
     }
@@ -95,8 +94,8 @@ public final class BudgetBlocks {
                 budget.period());
         if (Double.isNaN(storage)) {
             double gap = gains - losses;
-            return List.of(new Block(
-                    "not explained", gap, most, losses, gains, Ink.Token.RESIDUAL, Mark.Texture.PLAIN));
+            return List.of(
+                    new Block("not explained", gap, most, losses, gains, Ink.Token.RESIDUAL, Mark.Texture.PLAIN));
         }
         String verb = storage < 0 ? "storage gives" : "storage takes";
         double level = losses + storage;
@@ -122,7 +121,8 @@ public final class BudgetBlocks {
         }
         return sides + " + change in storage " + Figures.typeset(storage) + " + residual " + Figures.typeset(residual)
                 + ", in " + unit.words() + "; heights are to scale."
-                + (flows == Flows.NET ? " Of each item the net flow is shown." : "") + " Within the period storage gave "
+                + (flows == Flows.NET ? " Of each item the net flow is shown." : "")
+                + " Within the period storage gave "
                 + Figures.typeset(stored(Entry::inflow)) + " and took " + Figures.typeset(stored(Entry::outflow)) + ".";
     }
 
@@ -136,7 +136,8 @@ public final class BudgetBlocks {
     }
 
     private String description() {
-        return equation() + largest(" The largest gains: ", slices.gains())
+        return equation()
+                + largest(" The largest gains: ", slices.gains())
                 + largest(" The largest losses: ", slices.losses());
     }
 

@@ -34,14 +34,15 @@ public final class StorageCurve {
         this.periods = budgets.stream().map(PeriodBudget::period).toList();
         this.unit = unit;
         this.width = width;
-        this.storageKnown =
-                budgets.stream().anyMatch(budget -> !Double.isNaN(budget.totals().storageChange()));
+        this.storageKnown = budgets.stream()
+                .anyMatch(budget -> !Double.isNaN(budget.totals().storageChange()));
         storage.add(0.0);
         residual.add(0.0);
         for (PeriodBudget budget : budgets) {
             Totals totals = budget.totals();
             double change = storageKnown ? unit.of(totals.storageChange(), budget.period()) : 0;
-            double open = unit.of(storageKnown ? totals.residual() : totals.inflow() - totals.outflow(), budget.period());
+            double open =
+                    unit.of(storageKnown ? totals.residual() : totals.inflow() - totals.outflow(), budget.period());
             if (!Double.isFinite(change + open)) {
                 break;
             }
@@ -60,8 +61,7 @@ public final class StorageCurve {
      * @param width in logical pixels, at least 340
      * @throws IllegalArgumentException if the unit is one of rates
      */
-    public static Picture of(
-            String prism, List<PeriodBudget> budgets, Times times, UnitShown unit, double width) {
+    public static Picture of(String prism, List<PeriodBudget> budgets, Times times, UnitShown unit, double width) {
         if (unit.rate()) {
             throw new IllegalArgumentException("rates do not add up through time");
         }
@@ -70,8 +70,7 @@ public final class StorageCurve {
 
     private Picture picture(String prism, Times times) {
         List<Mark> marks = new ArrayList<>();
-        double[] range =
-                DoubleStream.concat(values(storage), values(residual)).toArray();
+        double[] range = DoubleStream.concat(values(storage), values(residual)).toArray();
         double least = DoubleStream.of(range).min().orElse(0);
         double greatest = DoubleStream.of(range).max().orElse(0);
         double high = width >= 600 ? 190 : 160;
@@ -87,7 +86,8 @@ public final class StorageCurve {
         axis.zero(left, right, marks);
         double bottom = keyEnd + TOP + high;
         time.draw(bottom + 4, width, marks);
-        return new Picture(width, bottom + 28, "Water stored in " + prism + " since the record began", description(), marks);
+        return new Picture(
+                width, bottom + 28, "Water stored in " + prism + " since the record began", description(), marks);
     }
 
     private void draw(TimeAxis time, ValueAxis axis, List<Mark> marks) {
@@ -152,8 +152,7 @@ public final class StorageCurve {
                         + " periods, since no number can be given for the next."
                 : "";
         if (!storageKnown) {
-            return "Storage is not known; gains − losses, " + last(residual) + "."
-                    + covered;
+            return "Storage is not known; gains − losses, " + last(residual) + "." + covered;
         }
         return "Storage has taken, " + last(storage) + "; in between, from "
                 + Figures.typeset(values(storage).min().orElse(0)) + " to "
