@@ -44,8 +44,7 @@ public final class RampLegend {
             double half = Lettering.width(ticks.label(i), SIZE) / 2;
             double middle = Math.max(place.x() + half, Math.min(place.right() - half, x));
             double base = strip.bottom() + TICK + SIZE;
-            if (labels.place(
-                    List.of(Mark.Text.of(middle, base, ticks.label(i), SIZE, Anchor.MIDDLE)), legend.marks)) {
+            if (labels.place(List.of(Mark.Text.of(middle, base, ticks.label(i), SIZE, Anchor.MIDDLE)), legend.marks)) {
                 legend.tick(x, strip.bottom(), x, strip.bottom() + TICK);
             }
         }
@@ -119,8 +118,7 @@ public final class RampLegend {
             colours[i] = 0xff000000 | scale.ramp().rgb(upright ? 1 - share : share);
         }
         marks.add(new Mark.Image(upright ? 1 : COLOURS, upright ? COLOURS : 1, colours, placement));
-        marks.add(new Mark.Area(
-                List.of(strip.ring()), Optional.empty(), Optional.of(Stroke.of(Ink.Token.MUTED, 1))));
+        marks.add(new Mark.Area(List.of(strip.ring()), Optional.empty(), Optional.of(Stroke.of(Ink.Token.MUTED, 1))));
     }
 
     private void tick(double fromX, double fromY, double toX, double toY) {

@@ -24,10 +24,11 @@ class MapFurnitureTest {
         assertThat(bar.length()).isLessThanOrEqualTo(120 * (1 + 1e-9)).isGreaterThan(120 / 2.6);
         assertThat(metres * scale).isCloseTo(bar.length(), within(1e-9 * bar.length()));
         double digit = metres / Math.pow(10, Math.floor(Math.log10(metres * (1 + 1e-9))));
-        assertThat(digit).satisfiesAnyOf(
-                one -> assertThat(one).isCloseTo(1, within(1e-9)),
-                two -> assertThat(two).isCloseTo(2, within(1e-9)),
-                five -> assertThat(five).isCloseTo(5, within(1e-9)));
+        assertThat(digit)
+                .satisfiesAnyOf(
+                        one -> assertThat(one).isCloseTo(1, within(1e-9)),
+                        two -> assertThat(two).isCloseTo(2, within(1e-9)),
+                        five -> assertThat(five).isCloseTo(5, within(1e-9)));
         Drawn.isLegible(page(bar.marks(10, 10)));
     }
 
