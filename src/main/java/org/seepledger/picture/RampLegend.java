@@ -37,7 +37,7 @@ public final class RampLegend {
         Box strip = new Box(place.x(), place.y() + 17, place.width(), STRIP);
         legend.marks.add(title(words, place));
         legend.strip(strip, new double[] {strip.width() / COLOURS, 0, 0, STRIP, strip.x(), strip.y()}, false);
-        Labels labels = new Labels(new Box(place.x() - 1, strip.bottom(), place.width() + 2, 30));
+        Labels labels = new Labels(new Box(place.x() - 2, strip.bottom(), place.width() + 4, 30));
         Ticks ticks = levelTicks(scale, place.width());
         for (int i = 0; i < ticks.count(); i++) {
             double x = strip.x() + scale.share(ticks.values().get(i)) * strip.width();
