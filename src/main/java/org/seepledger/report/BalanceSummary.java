@@ -117,13 +117,12 @@ public final class BalanceSummary {
 
     private void writeClosure(PeriodBudget record, PrismBudget periods) {
         Totals totals = record.totals();
-        double time = record.period().duration();
         if (Double.isNaN(totals.storageChange())) {
             double unexplained = totals.inflow() - totals.outflow();
             text.append(
                             "  Closure cannot be judged: change in storage is not known. Inflow less outflow, storage included,"
                                     + " is ")
-                    .append(rate(unexplained, time, true))
+                    .append(rate(unexplained, record, true))
                     .append(".\n");
             return;
         }
@@ -133,8 +132,8 @@ public final class BalanceSummary {
         text.append(" of throughput (")
                 .append(Figures.percent(totals.netClosureError()))
                 .append(" of net flow): ");
-        text.append(rate(totals.residual(), time, true)).append(" of ");
-        text.append(rate(totals.throughput(), time, true)).append(" is unexplained.\n");
+        text.append(rate(totals.residual(), record, true)).append(" of ");
+        text.append(rate(totals.throughput(), record, true)).append(" is unexplained.\n");
         if (periods.periods().size() > 1) {
             periods.periods().stream()
                     .max(Comparator.comparingDouble(
@@ -164,24 +163,23 @@ public final class BalanceSummary {
         }
         List<Term> sorted = new ArrayList<>(terms.values());
         sorted.sort(Comparator.comparingDouble((Term term) -> -Math.max(term.inflow(), term.outflow())));
-        double time = record.period().duration();
         double throughput = record.totals().throughput();
         TextTable table = new TextTable().row("", "in", "out", "net", "of throughput");
         for (Term term : sorted.subList(0, Math.min(TERMS_SHOWN, sorted.size()))) {
             table.row(
                     term.item(),
-                    rate(term.inflow(), time, false),
-                    rate(term.outflow(), time, false),
-                    rate(term.net(), time, false),
+                    rate(term.inflow(), record, false),
+                    rate(term.outflow(), record, false),
+                    rate(term.net(), record, false),
                     Figures.percent(throughput == 0 ? Double.NaN : 100 * Math.abs(term.net()) / throughput));
         }
         if (sorted.size() > TERMS_SHOWN) {
             Term rest = sorted.subList(TERMS_SHOWN, sorted.size()).stream().reduce(new Term("", 0, 0), Term::plus);
             table.row(
                     counted(sorted.size() - TERMS_SHOWN, "smaller term"),
-                    rate(rest.inflow(), time, false),
-                    rate(rest.outflow(), time, false),
-                    rate(rest.net(), time, false),
+                    rate(rest.inflow(), record, false),
+                    rate(rest.outflow(), record, false),
+                    rate(rest.net(), record, false),
                     "");
         }
         text.append("  Largest terms in ").append(units.rate()).append(":\n");
@@ -204,8 +202,10 @@ public final class BalanceSummary {
         HotSpots.append(text, aquifer.grid(), where.largest(), unit, units.rateFactor(), throughput);
     }
 
-    private String rate(double volume, double time, boolean withUnit) {
-        String shown = Figures.shown(volume / time * units.rateFactor());
+    /** A rate over the record; rounding of the terms that make the throughput counts as 0. */
+    private String rate(double volume, PeriodBudget record, boolean withUnit) {
+        double factor = units.rateFactor() / record.period().duration();
+        String shown = Figures.shown(volume * factor, record.totals().throughput() * factor);
         return withUnit ? shown + " " + units.rate() : shown;
     }
 }

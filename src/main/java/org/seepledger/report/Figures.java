@@ -10,6 +10,9 @@ public final class Figures {
     private static final double SMALL = 1e-4;
     private static final double LARGE = 1e12;
 
+    /** Sums of some thousand terms in double precision are as exact as this. */
+    private static final double ROUNDING = 1e-12;
+
     private Figures() {}
 
     /**
@@ -34,7 +37,17 @@ public final class Figures {
     }
 
     /**
-     * {@return a percentage to two decimals, or in powers of ten where that would be 0.00}
+     * {@return a number as {@link #shown}, but 0 where it is nothing but rounding}
+     *
+     * @param value the number
+     * @param scale the magnitude of the numbers that it was reckoned from
+     */
+    public static String shown(double value, double scale) {
+        return shown(Math.abs(value) < ROUNDING * scale ? 0 : value);
+    }
+
+    /**
+     * {@return a percentage to two decimals, or in powers of ten where that would be 0.00 though it is more than rounding}
      *
      * @param value in percent
      */
@@ -42,7 +55,8 @@ public final class Figures {
         if (Double.isNaN(value)) {
             return "-";
         }
-        boolean small = value != 0 && Math.abs(value) < 0.005;
-        return String.format(Locale.ROOT, small ? "%.0e %%" : "%.2f %%", value);
+        boolean small = Math.abs(value) < 0.005 && Math.abs(value) >= 100 * ROUNDING;
+        double shown = Math.abs(value) < 100 * ROUNDING ? 0 : value;
+        return String.format(Locale.ROOT, small ? "%.0e %%" : "%.2f %%", shown);
     }
 }
