@@ -207,7 +207,7 @@ class TraceJobTest {
             value = {
                 "a/c/record/side 1/1 | no prism \"a/c\". The nearest is \"a/b\".",
                 "a/b/recrod/side 1/1 | no period \"recrod\". The nearest is \"record\".",
-                "a/b/record/sidr 1/1 | no item and layer \"sidr 1/1\". The nearest is \"side 1/1\".",
+                "a/b/record/sidr 3/1 | no item and layer \"sidr 3/1\". The nearest is \"side 3/1\".",
                 "a/b | nothing follows the prism \"a/b\"",
                 "a/b/record/unheard-of thing/7 | \"side 3\"",
             })
