@@ -24,10 +24,17 @@ import org.seepledger.prism.Prism;
  * @param layers how many layers it has
  * @param clip whether prisms that reach beyond the grid are cut at its edge; else they are refused
  * @param surfaces reads the rasters that stand for a top or bottom
- * @param notes told what a user should know, a line each
+ * @param warnings told what may make a number wrong, a line each
+ * @param notes told what else a user should know, a line each
  */
 public record PrismsReader(
-        PlanCrs crs, Grid grid, int layers, boolean clip, SurfaceReader surfaces, Consumer<String> notes) {
+        PlanCrs crs,
+        Grid grid,
+        int layers,
+        boolean clip,
+        SurfaceReader surfaces,
+        Consumer<String> warnings,
+        Consumer<String> notes) {
 
     /**
      * {@return the prisms of a file, in its order}
@@ -45,7 +52,7 @@ public record PrismsReader(
         FeatureReader reader = new FeatureReader(
                 new RingsReader(fileCrs.transform(root, whole), fileCrs.remedyForDegrees()),
                 new VerticalRangeReader(layers, folder, surfaces),
-                new OwnKeys(notes));
+                new OwnKeys(warnings, notes));
         GridEdge edge = GridEdge.of(grid);
         List<Prism> prisms = new ArrayList<>();
         for (JsonNode feature : features) {
@@ -92,7 +99,7 @@ public record PrismsReader(
             throw spot.fault(
                     "a polygon that lies outside the grid",
                     "a polygon on the grid, which has " + extent(),
-                    "Check the coordinates and the CRS of both.");
+                    crs.isLocal() ? remedyForLocal(prism) : "Check the coordinates and the CRS of both.");
         }
         if (!clip) {
             throw spot.fault(
@@ -108,6 +115,17 @@ public record PrismsReader(
             notes.accept(spot + ": wholly outside the grid, and without rows, are " + String.join(", ", lost));
         }
         return left;
+    }
+
+    /** Where coordinates are local ones, a GIS's longitudes and latitudes are the likeliest mistake. */
+    private static String remedyForLocal(Prism prism) {
+        boolean degrees = prism.rings().stream()
+                .flatMap(ring -> ring.sides().stream())
+                .allMatch(side -> Math.abs(side.x()) <= 180 && Math.abs(side.y()) <= 90);
+        return degrees
+                ? "They look like longitude and latitude, but the aquifer's crs is null, so that they are taken as local"
+                        + " coordinates: name the aquifer's crs in aquifer.json, or write the polygon in its coordinates."
+                : "Check the coordinates: the aquifer's crs is null, so that both must be in the same local ones.";
     }
 
     private static Set<String> items(Prism prism) {
