@@ -11,6 +11,7 @@ import org.seepledger.fault.DataFault;
 import org.seepledger.prism.Prism;
 import org.seepledger.prism.Ring;
 import org.seepledger.prism.Side;
+import org.seepledger.prism.SideSelection;
 
 /** Puts sides under the names that the property {@code boundaries} gives them. */
 final class BoundariesReader {
