@@ -7,6 +7,7 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
+import java.time.LocalDate;
 import java.util.List;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
@@ -57,6 +58,24 @@ class ExtractJobTest {
         assertSameBudget(folder.resolve("set"));
         assertThat(Rows.of(folder.resolve("extract/faces.csv")))
                 .hasSizeLessThan(Rows.of(folder.resolve("set/faces.csv")).size());
+    }
+
+    /** Of solutes, what is read is kept, with its files; what names files that are not copied goes. */
+    @Test
+    void keepsThePorositiesOfSolutesAlone() throws IOException {
+        Path set = folder.resolve("set");
+        SmallSets.heads(set);
+        Files.writeString(set.resolve("pores.csv"), "layer,n\n1,0.3\n2,0.2\n");
+        Path description = set.resolve("aquifer.json");
+        String solutes = "{\"solutes\": [{\"name\": \"salt\", \"porosity\": {\"file\": \"pores.csv\"},"
+                + " \"concentration\": \"not-there.tif\"}], ";
+        Files.writeString(description, Files.readString(description).replaceFirst("\\{", solutes));
+        assertSameBudget(set);
+        assertThat(folder.resolve("extract/pores.csv")).exists();
+        assertThat(folder.resolve("extract/aquifer.json"))
+                .content()
+                .contains("salt", "pores.csv")
+                .doesNotContain("not-there");
     }
 
     @Test
@@ -116,7 +135,8 @@ class ExtractJobTest {
                         WellRule.POINT,
                         true,
                         2,
-                        false),
+                        false,
+                        ReportRequest.dated(LocalDate.of(2024, 5, 31))),
                 Progress.NONE);
         return Rows.text(out.resolve("budget.csv"));
     }
