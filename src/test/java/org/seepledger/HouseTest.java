@@ -46,7 +46,12 @@ class HouseTest {
             List.of("unit", "fault", "progress"));
 
     private static final String[] ENGINE = {
-        ROOT + "balance..", ROOT + "plume..", ROOT + "prism..", ROOT + "aquifer..", ROOT + "ledger..",
+        ROOT + "balance..",
+        ROOT + "plume..",
+        ROOT + "sketch..",
+        ROOT + "prism..",
+        ROOT + "aquifer..",
+        ROOT + "ledger..",
     };
 
     @ArchTest
@@ -131,6 +136,15 @@ class HouseTest {
             .should()
             .dependOnClassesThat(describe("files", HouseTest::isAboutFiles))
             .because("the engine asks suppliers for one interval and band at a time, wherever they have it from");
+
+    @ArchTest
+    static final ArchRule BUDGETS_KNOW_NO_DRAWINGS = noClasses()
+            .that()
+            .resideInAnyPackage(ROOT + "balance..", ROOT + "plume..")
+            .should()
+            .dependOnClassesThat()
+            .resideInAPackage(ROOT + "sketch..")
+            .because("a budget is struck for prisms, however they came to be");
 
     @ArchTest
     static final ArchRule ENGINE_KNOWS_NO_WINDOWS = noClasses()
