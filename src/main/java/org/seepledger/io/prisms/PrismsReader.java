@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Set;
 import java.util.function.Consumer;
+import org.locationtech.jts.geom.Coordinate;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.fault.DataFault;
 import org.seepledger.io.DataFolder;
@@ -15,6 +16,9 @@ import org.seepledger.io.JsonFile;
 import org.seepledger.io.crs.PlanCrs;
 import org.seepledger.prism.GridEdge;
 import org.seepledger.prism.Prism;
+import org.seepledger.prism.Ring;
+import org.seepledger.prism.Side;
+import org.seepledger.prism.SideNumbering;
 
 /**
  * Reads prisms from a GeoJSON file.
@@ -54,6 +58,34 @@ public record PrismsReader(
             prisms.add(within(edge, prism, new Spot(shownFile, "feature " + number + " " + Spot.quoted(prism.name()))));
         }
         return prisms;
+    }
+
+    /**
+     * {@return a prism that was drawn rather than read, as it would be read from a file}
+     *
+     * @param drawn the prism, in map coordinates
+     * @throws DataFault if it is no polygon, or does not lie on the grid
+     */
+    public Prism admitted(Prism drawn) {
+        Spot spot = new Spot(Spot.quoted(drawn.name()), "");
+        RingNames names = new RingNames(new SideNumbering(drawn.parts().size() > 1));
+        new PolygonCheck(names, spot, "")
+                .check(drawn.parts().stream().map(PrismsReader::closed).toList());
+        return within(GridEdge.of(grid), drawn, spot);
+    }
+
+    private static List<Coordinate[]> closed(List<Ring> part) {
+        List<Coordinate[]> rings = new ArrayList<>();
+        for (Ring ring : part) {
+            int count = ring.sides().size();
+            Coordinate[] vertices = new Coordinate[count + 1];
+            for (int i = 0; i <= count; i++) {
+                Side side = ring.sides().get(i % count);
+                vertices[i] = new Coordinate(side.x(), side.y());
+            }
+            rings.add(vertices);
+        }
+        return rings;
     }
 
     private static List<JsonNode> features(JsonNode root, Spot spot) {
