@@ -17,6 +17,7 @@ import org.seepledger.ledger.Group;
 import org.seepledger.ledger.Ledger;
 import org.seepledger.ledger.PeriodBudget;
 import org.seepledger.ledger.Totals;
+import org.seepledger.unit.Figures;
 
 /** The summary of a balance on the terminal: first the warnings, then for each prism
  * whether it closes, what dominates, and where it does not. */

@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Locale;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.balance.HotSpot;
+import org.seepledger.unit.Figures;
 
 /** Cells that do not balance, as a table with their places on the map. */
 final class HotSpots {

@@ -11,6 +11,7 @@ import org.seepledger.io.aquifer.AquiferFolder;
 import org.seepledger.ledger.Disclaimer;
 import org.seepledger.ledger.PeriodBudget;
 import org.seepledger.ledger.Totals;
+import org.seepledger.unit.Figures;
 import org.seepledger.unit.Measure;
 
 /** What {@code inspect} prints of a set: what it is, its values, how it balances in itself, and what looks wrong. */

@@ -1,4 +1,4 @@
-package org.seepledger.report;
+package org.seepledger.unit;
 
 import java.math.BigDecimal;
 import java.math.MathContext;
@@ -44,5 +44,15 @@ public final class Figures {
         }
         boolean small = value != 0 && Math.abs(value) < 0.005;
         return String.format(Locale.ROOT, small ? "%.0e %%" : "%.2f %%", value);
+    }
+
+    /**
+     * {@return a number for page and window: four significant digits, a true minus, thousands kept apart by a narrow space
+     * that no line breaks at, and a dash where there is none}
+     *
+     * @param value the number
+     */
+    public static String typeset(double value) {
+        return Double.isNaN(value) ? "–" : shown(value).replace('-', '−').replace(' ', '\u202f');
     }
 }

@@ -1,0 +1,59 @@
+package org.seepledger.desktop.session;
+
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.List;
+import org.seepledger.aquifer.Aquifer;
+import org.seepledger.desktop.task.EntryGuard;
+import org.seepledger.io.aquifer.AquiferFolder;
+import org.seepledger.io.aquifer.AquiferReader;
+import org.seepledger.io.prisms.PrismsReader;
+import org.seepledger.io.prisms.SurfaceRasters;
+import org.seepledger.prism.Prism;
+
+/**
+ * A folder as it was opened.
+ *
+ * @param set the set
+ * @param prisms the prisms that lie beside it, if any
+ */
+public record Opening(OpenSet set, List<Prism> prisms) {
+
+    /** What the prisms beside an aquifer are called. */
+    public static final String PRISMS = "prisms.geojson";
+
+    /**
+     * Opens an aquifer folder and reads the prisms beside it.
+     *
+     * @param folder the folder, or the {@code aquifer.json} in it
+     * @return what was found
+     * @throws org.seepledger.fault.DataFault if something is wrong with either
+     */
+    public static Opening of(Path folder) {
+        EntryGuard.enter();
+        Path path = isSetFile(folder) ? folder.toAbsolutePath().getParent() : folder;
+        AquiferFolder opened = AquiferReader.open(path);
+        SurfaceRasters surfaces = new SurfaceRasters(opened.aquifer().grid(), note -> {});
+        OpenSet set = new OpenSet(path, opened, surfaces);
+        try {
+            return new Opening(set, prisms(path.resolve(PRISMS), set));
+        } catch (RuntimeException e) {
+            set.close();
+            throw e;
+        }
+    }
+
+    private static boolean isSetFile(Path path) {
+        return path.endsWith(AquiferReader.FILE) && Files.isRegularFile(path);
+    }
+
+    private static List<Prism> prisms(Path file, OpenSet set) {
+        if (!Files.isRegularFile(file)) {
+            return List.of();
+        }
+        Aquifer aquifer = set.aquifer();
+        int layers = aquifer.layers().size();
+        return new PrismsReader(set.folder().crs(), aquifer.grid(), layers, false, set.surfaces(), note -> {})
+                .read(file, file.toString());
+    }
+}

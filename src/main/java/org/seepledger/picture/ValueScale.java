@@ -1,0 +1,57 @@
+package org.seepledger.picture;
+
+import java.util.stream.DoubleStream;
+
+/**
+ * Which colour a value has.
+ *
+ * @param ramp the colours
+ * @param from the value at the ramp's beginning
+ * @param to the value at its end, beyond {@code from}
+ */
+public record ValueScale(Ramp ramp, double from, double to) {
+
+    /** Refuses an empty range. */
+    public ValueScale {
+        if (!(to > from)) {
+            throw new IllegalArgumentException("no range from " + from + " to " + to);
+        }
+    }
+
+    /**
+     * {@return a scale from the least to the greatest of some values; a narrow one about a single value, and 0 to 1 about
+     * none}
+     *
+     * @param values the values; those that are not finite do not count
+     */
+    public static ValueScale over(double[] values) {
+        double least = finite(values).min().orElse(0);
+        double greatest = finite(values).max().orElse(1);
+        double room = greatest > least ? 0 : Math.max(1e-3, 1e-3 * Math.abs(least));
+        return new ValueScale(Ramp.DEPTH, least - room, greatest + room);
+    }
+
+    /**
+     * {@return a scale that has 0 in its middle}
+     *
+     * @param values the values; those that are not finite do not count
+     */
+    public static ValueScale aboutZero(double[] values) {
+        double greatest = finite(values).map(Math::abs).max().orElse(0);
+        double end = greatest > 0 ? greatest : 1;
+        return new ValueScale(Ramp.SWING, -end, end);
+    }
+
+    private static DoubleStream finite(double[] values) {
+        return DoubleStream.of(values).filter(Double::isFinite);
+    }
+
+    /**
+     * {@return the colour of a value, opaque; nothing for one that is not finite}
+     *
+     * @param value the value
+     */
+    public int argb(double value) {
+        return Double.isFinite(value) ? 0xff000000 | ramp.rgb((value - from) / (to - from)) : 0;
+    }
+}

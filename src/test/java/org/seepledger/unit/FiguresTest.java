@@ -1,0 +1,29 @@
+package org.seepledger.unit;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import org.junit.jupiter.api.Test;
+
+class FiguresTest {
+
+    @Test
+    void haveFourSignificantDigits() {
+        assertThat(Figures.shown(1234567.8)).isEqualTo("1 235 000");
+        assertThat(Figures.shown(-0.00123456)).isEqualTo("-0.001235");
+        assertThat(Figures.shown(999.96)).isEqualTo("1 000");
+        assertThat(Figures.shown(1.23456e-7)).isEqualTo("1.235e-07");
+        assertThat(Figures.shown(-0.0)).isEqualTo("0");
+    }
+
+    @Test
+    void whatIsNotKnownIsADashNeverZero() {
+        assertThat(Figures.shown(Double.NaN)).isEqualTo("-");
+        assertThat(Figures.percent(Double.NaN)).isEqualTo("-");
+        assertThat(Figures.typeset(Double.NaN)).isEqualTo("–");
+    }
+
+    @Test
+    void onPageAndWindowHaveATrueMinusAndDoNotBreak() {
+        assertThat(Figures.typeset(-12345.6)).isEqualTo("−12\u202f350");
+    }
+}
