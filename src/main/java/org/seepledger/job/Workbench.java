@@ -116,7 +116,7 @@ public final class Workbench implements AutoCloseable {
     }
 
     /**
-     * {@return the prisms of a file; the rasters that they name stay open as long as the workbench}
+     * {@return the prisms of a file as they stand there, even beyond the grid; the rasters that they name stay open as long as the workbench}
      *
      * @param file a GeoJSON file
      * @throws org.seepledger.fault.DataFault if anything in it is wrong
@@ -125,7 +125,7 @@ public final class Workbench implements AutoCloseable {
         return ask(Progress.NONE, progress -> {
             List<String> notes = new ArrayList<>();
             synchronized (surfaces) {
-                return new PrismsFile(reader(notes::add).read(file, file.toString()), notes);
+                return new PrismsFile(reader(notes::add).asDrawn(file, file.toString()), notes);
             }
         });
     }

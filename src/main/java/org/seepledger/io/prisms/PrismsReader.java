@@ -41,6 +41,23 @@ public record PrismsReader(
      * @throws DataFault if anything in it is wrong, with the feature and key or coordinates
      */
     public List<Prism> read(Path file, String shownFile) {
+        GridEdge edge = GridEdge.of(grid);
+        List<Prism> prisms = new ArrayList<>();
+        for (Prism prism : asDrawn(file, shownFile)) {
+            String place = "feature " + (prisms.size() + 1) + " " + Spot.quoted(prism.name());
+            prisms.add(within(edge, prism, new Spot(shownFile, place)));
+        }
+        return prisms;
+    }
+
+    /**
+     * {@return the prisms of a file as they stand there, even where they reach beyond the grid}
+     *
+     * @param file a FeatureCollection of Polygons and MultiPolygons, or one Feature
+     * @param shownFile the file as the user named it, for messages
+     * @throws DataFault if anything else in it is wrong, with the feature and key or coordinates
+     */
+    public List<Prism> asDrawn(Path file, String shownFile) {
         JsonNode root = JsonFile.read(file, shownFile);
         Spot whole = new Spot(shownFile, "");
         List<JsonNode> features = features(root, whole);
@@ -50,12 +67,9 @@ public record PrismsReader(
                 new RingsReader(fileCrs.transform(root, whole), fileCrs.remedyForDegrees()),
                 new VerticalRangeReader(layers, folder, surfaces),
                 new OwnKeys(notes));
-        GridEdge edge = GridEdge.of(grid);
         List<Prism> prisms = new ArrayList<>();
         for (JsonNode feature : features) {
-            int number = prisms.size() + 1;
-            Prism prism = reader.read(feature, number, shownFile);
-            prisms.add(within(edge, prism, new Spot(shownFile, "feature " + number + " " + Spot.quoted(prism.name()))));
+            prisms.add(reader.read(feature, prisms.size() + 1, shownFile));
         }
         return prisms;
     }
