@@ -66,8 +66,8 @@ final class Workbench {
                 new Action(window, "action.caution", "Shift+F1", view::showCaution),
                 new Action(time, "action.later", "Period", () -> shell.move(1)),
                 new Action(time, "action.earlier", "Comma", () -> shell.move(-1)),
-                new Action(time, "action.deeper", "Page_Down", () -> shell.sink(1)),
-                new Action(time, "action.higher", "Page_Up", () -> shell.sink(-1)));
+                new Action(time, "action.deeper", "Page Down", () -> shell.sink(1)),
+                new Action(time, "action.higher", "Page Up", () -> shell.sink(-1)));
     }
 
     private void show(Opening opening) {
