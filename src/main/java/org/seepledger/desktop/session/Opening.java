@@ -3,12 +3,9 @@ package org.seepledger.desktop.session;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
-import org.seepledger.aquifer.Aquifer;
 import org.seepledger.desktop.task.EntryGuard;
-import org.seepledger.io.aquifer.AquiferFolder;
 import org.seepledger.io.aquifer.AquiferReader;
-import org.seepledger.io.prisms.PrismsReader;
-import org.seepledger.io.prisms.SurfaceRasters;
+import org.seepledger.job.Workbench;
 import org.seepledger.prism.Prism;
 
 /**
@@ -32,9 +29,7 @@ public record Opening(OpenSet set, List<Prism> prisms) {
     public static Opening of(Path folder) {
         EntryGuard.enter();
         Path path = isSetFile(folder) ? folder.toAbsolutePath().getParent() : folder;
-        AquiferFolder opened = AquiferReader.open(path);
-        SurfaceRasters surfaces = new SurfaceRasters(opened.aquifer().grid(), note -> {});
-        OpenSet set = new OpenSet(path, opened, surfaces);
+        OpenSet set = new OpenSet(path, Workbench.open(path));
         try {
             return new Opening(set, prisms(path.resolve(PRISMS), set));
         } catch (RuntimeException e) {
@@ -51,9 +46,6 @@ public record Opening(OpenSet set, List<Prism> prisms) {
         if (!Files.isRegularFile(file)) {
             return List.of();
         }
-        Aquifer aquifer = set.aquifer();
-        int layers = aquifer.layers().size();
-        return new PrismsReader(set.folder().crs(), aquifer.grid(), layers, false, set.surfaces(), note -> {})
-                .read(file, file.toString());
+        return set.workbench().read(file).prisms();
     }
 }

@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Set;
 import java.util.function.Consumer;
+import org.locationtech.jts.geom.Coordinate;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.fault.DataFault;
 import org.seepledger.io.DataFolder;
@@ -15,6 +16,9 @@ import org.seepledger.io.JsonFile;
 import org.seepledger.io.crs.PlanCrs;
 import org.seepledger.prism.GridEdge;
 import org.seepledger.prism.Prism;
+import org.seepledger.prism.Ring;
+import org.seepledger.prism.Side;
+import org.seepledger.prism.SideNumbering;
 
 /**
  * Reads prisms from a GeoJSON file.
@@ -37,6 +41,23 @@ public record PrismsReader(
      * @throws DataFault if anything in it is wrong, with the feature and key or coordinates
      */
     public List<Prism> read(Path file, String shownFile) {
+        GridEdge edge = GridEdge.of(grid);
+        List<Prism> prisms = new ArrayList<>();
+        for (Prism prism : asDrawn(file, shownFile)) {
+            String place = "feature " + (prisms.size() + 1) + " " + Spot.quoted(prism.name());
+            prisms.add(within(edge, prism, new Spot(shownFile, place)));
+        }
+        return prisms;
+    }
+
+    /**
+     * {@return the prisms of a file as they stand there, even where they reach beyond the grid}
+     *
+     * @param file a FeatureCollection of Polygons and MultiPolygons, or one Feature
+     * @param shownFile the file as the user named it, for messages
+     * @throws DataFault if anything else in it is wrong, with the feature and key or coordinates
+     */
+    public List<Prism> asDrawn(Path file, String shownFile) {
         JsonNode root = JsonFile.read(file, shownFile);
         Spot whole = new Spot(shownFile, "");
         List<JsonNode> features = features(root, whole);
@@ -46,14 +67,39 @@ public record PrismsReader(
                 new RingsReader(fileCrs.transform(root, whole), fileCrs.remedyForDegrees()),
                 new VerticalRangeReader(layers, folder, surfaces),
                 new OwnKeys(notes));
-        GridEdge edge = GridEdge.of(grid);
         List<Prism> prisms = new ArrayList<>();
         for (JsonNode feature : features) {
-            int number = prisms.size() + 1;
-            Prism prism = reader.read(feature, number, shownFile);
-            prisms.add(within(edge, prism, new Spot(shownFile, "feature " + number + " " + Spot.quoted(prism.name()))));
+            prisms.add(reader.read(feature, prisms.size() + 1, shownFile));
         }
         return prisms;
+    }
+
+    /**
+     * {@return a prism that was drawn rather than read, as it would be read from a file}
+     *
+     * @param drawn the prism, in map coordinates
+     * @throws DataFault if it is no polygon, or does not lie on the grid
+     */
+    public Prism admitted(Prism drawn) {
+        Spot spot = new Spot(Spot.quoted(drawn.name()), "");
+        RingNames names = new RingNames(new SideNumbering(drawn.parts().size() > 1));
+        new PolygonCheck(names, spot, "")
+                .check(drawn.parts().stream().map(PrismsReader::closed).toList());
+        return within(GridEdge.of(grid), drawn, spot);
+    }
+
+    private static List<Coordinate[]> closed(List<Ring> part) {
+        List<Coordinate[]> rings = new ArrayList<>();
+        for (Ring ring : part) {
+            int count = ring.sides().size();
+            Coordinate[] vertices = new Coordinate[count + 1];
+            for (int i = 0; i <= count; i++) {
+                Side side = ring.sides().get(i % count);
+                vertices[i] = new Coordinate(side.x(), side.y());
+            }
+            rings.add(vertices);
+        }
+        return rings;
     }
 
     private static List<JsonNode> features(JsonNode root, Spot spot) {
