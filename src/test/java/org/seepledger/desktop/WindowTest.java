@@ -36,9 +36,9 @@ class WindowTest {
 
     @Test
     void aClickOnASampleOpensIt() {
-        window.await(() -> window.workbench().welcome().samples().size() == 2);
+        window.await(() -> window.assembly().welcome().samples().size() == 2);
         window.robot.clickOn("Invented valley");
-        window.await(() -> window.workbench().session().set().get().isPresent());
+        window.await(() -> window.assembly().session().set().get().isPresent());
         assertThat(window.robot.lookup("#set-name").queryAs(Button.class).getText())
                 .isEqualTo("Invented valley");
         assertThat(window.robot.lookup("#status").queryAs(Label.class).getText())
@@ -73,8 +73,8 @@ class WindowTest {
         window.robot.clickOn("#actions-sought").write("dark");
         window.robot.press(KeyCode.ENTER).release(KeyCode.ENTER);
         assertThat(isShown("#actions-page")).isFalse();
-        assertThat(window.workbench().shell().theme().get()).isEqualTo(Theme.DARK);
-        assertThat(window.workbench().scene().getRoot().getStyleClass())
+        assertThat(window.assembly().shell().theme().get()).isEqualTo(Theme.DARK);
+        assertThat(window.assembly().scene().getRoot().getStyleClass())
                 .contains("sl-dark")
                 .doesNotContain("sl-light");
     }
@@ -83,13 +83,13 @@ class WindowTest {
     void keysMoveThroughTimeAndLayersAndStopAtTheEnds() {
         window.openSet(Path.of("sample-aquifers/valley"));
         window.robot.press(KeyCode.COMMA).release(KeyCode.COMMA);
-        assertThat(window.workbench().session().interval().get()).isZero();
+        assertThat(window.assembly().session().interval().get()).isZero();
         window.robot.press(KeyCode.PERIOD).release(KeyCode.PERIOD);
-        assertThat(window.workbench().session().interval().get()).isEqualTo(1);
+        assertThat(window.assembly().session().interval().get()).isEqualTo(1);
         for (int i = 0; i < 4; i++) {
             window.robot.press(KeyCode.PAGE_DOWN).release(KeyCode.PAGE_DOWN);
         }
-        assertThat(window.workbench().session().layer().get()).isEqualTo(2);
+        assertThat(window.assembly().session().layer().get()).isEqualTo(2);
     }
 
     @Test
