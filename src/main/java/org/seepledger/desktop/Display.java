@@ -1,6 +1,7 @@
 package org.seepledger.desktop;
 
 import java.util.Locale;
+import java.util.Map;
 import java.util.stream.Stream;
 
 /** Whether there is a screen. */
@@ -10,14 +11,16 @@ final class Display {
 
     /** Asks the environment, since the toolkit's own answer is a stack trace from a thread of its own. */
     static boolean exists() {
-        boolean named = Stream.of("DISPLAY", "WAYLAND_DISPLAY")
-                .map(System::getenv)
-                .anyMatch(screen -> screen != null && !screen.isBlank());
-        return named || hasScreenAnyway();
+        return System.getProperty("glass.platform") != null
+                || exists(System.getProperty("os.name", ""), System.getenv());
     }
 
-    private static boolean hasScreenAnyway() {
-        String system = System.getProperty("os.name", "").toLowerCase(Locale.ROOT);
-        return system.contains("windows") || system.contains("mac") || System.getProperty("glass.platform") != null;
+    static boolean exists(String system, Map<String, String> environment) {
+        String name = system.toLowerCase(Locale.ROOT);
+        return name.contains("windows")
+                || name.contains("mac")
+                || Stream.of("DISPLAY", "WAYLAND_DISPLAY")
+                        .anyMatch(
+                                screen -> !environment.getOrDefault(screen, "").isBlank());
     }
 }

@@ -27,8 +27,8 @@ public final class WindowApplication extends Application {
 
     @Override
     public void start(Stage stage) {
-        Workbench workbench = new Workbench(
-                new Workbench.Outside(
+        Assembly assembly = new Assembly(
+                new Assembly.Outside(
                         tasks,
                         new ScreenDialogs(stage),
                         new ScreenQuestions(stage),
@@ -38,8 +38,8 @@ public final class WindowApplication extends Application {
         stage.setTitle(Words.of("program"));
         stage.setMinWidth(LEAST_WIDTH);
         stage.setMinHeight(LEAST_HEIGHT);
-        stage.setScene(workbench.scene());
-        getParameters().getRaw().stream().findFirst().map(Path::of).ifPresent(workbench.welcome()::open);
+        stage.setScene(assembly.scene());
+        getParameters().getRaw().stream().findFirst().map(Path::of).ifPresent(assembly.welcome()::open);
         stage.show();
     }
 

@@ -25,7 +25,7 @@ public final class OpenWindow implements AutoCloseable {
     public final GivenAnswers answers = new GivenAnswers();
 
     private final BackgroundTasks tasks = new BackgroundTasks(Platform::runLater);
-    private Workbench workbench;
+    private Assembly assembly;
     private Stage stage;
 
     /**
@@ -38,9 +38,9 @@ public final class OpenWindow implements AutoCloseable {
         try {
             stage = FxToolkit.registerPrimaryStage();
             FxToolkit.setupFixture(() -> {
-                workbench = new Workbench(
-                        new Workbench.Outside(tasks, answers, answers, answers, answers), List.of(Path.of("")));
-                stage.setScene(workbench.scene());
+                assembly = new Assembly(
+                        new Assembly.Outside(tasks, answers, answers, answers, answers), List.of(Path.of("")));
+                stage.setScene(assembly.scene());
                 stage.setX(0);
                 stage.setY(0);
                 stage.setWidth(width);
@@ -54,8 +54,8 @@ public final class OpenWindow implements AutoCloseable {
 
     /** Opens a set and waits until it is there. */
     public void openSet(Path folder) {
-        robot.interact(() -> workbench.welcome().open(folder));
-        await(() -> workbench.session().set().get().isPresent());
+        robot.interact(() -> assembly.welcome().open(folder));
+        await(() -> assembly.session().set().get().isPresent());
     }
 
     /** Waits until something holds. */
@@ -75,8 +75,8 @@ public final class OpenWindow implements AutoCloseable {
         WaitForAsyncUtils.waitForFxEvents();
     }
 
-    Workbench workbench() {
-        return workbench;
+    Assembly assembly() {
+        return assembly;
     }
 
     Stage stage() {

@@ -25,7 +25,7 @@ public final class Screenshots {
         for (int[] size : new int[][] {{1280, 800}, {1920, 1080}}) {
             try (OpenWindow window = new OpenWindow(size[0], size[1])) {
                 String suffix = "-" + size[0] + "x" + size[1] + ".png";
-                window.await(() -> !window.workbench().welcome().samples().isEmpty());
+                window.await(() -> !window.assembly().welcome().samples().isEmpty());
                 both(window, folder, "welcome", suffix);
                 window.openSet(Path.of("sample-aquifers/valley"));
                 window.settle();
@@ -37,7 +37,7 @@ public final class Screenshots {
 
     private static void both(OpenWindow window, Path folder, String name, String suffix) throws IOException {
         for (Theme theme : Theme.values()) {
-            window.robot.interact(() -> window.workbench().shell().theme().set(theme));
+            window.robot.interact(() -> window.assembly().shell().theme().set(theme));
             window.settle();
             String lit = theme.name().toLowerCase(java.util.Locale.ROOT);
             write(window, folder.resolve(name + "-" + lit + suffix));

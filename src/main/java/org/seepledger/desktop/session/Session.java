@@ -21,6 +21,7 @@ public final class Session {
     private final StringProperty selected = new SimpleStringProperty("");
     private final StringProperty lit = new SimpleStringProperty("");
     private final StringProperty status = new SimpleStringProperty("");
+    private final ObjectProperty<FaceFlows> faceFlows = new SimpleObjectProperty<>(FaceFlows.NONE);
     private final ObjectProperty<Demand> demand = new SimpleObjectProperty<>(Demand.NONE);
 
     /** What one pane asks of the map. */
@@ -38,6 +39,7 @@ public final class Session {
      */
     public void show(Optional<OpenSet> opened) {
         lit.set("");
+        faceFlows.set(FaceFlows.NONE);
         selected.set("");
         interval.set(0);
         layer.set(0);
@@ -83,6 +85,11 @@ public final class Session {
     /** {@return what the status line says} */
     public StringProperty status() {
         return status;
+    }
+
+    /** {@return what flows through the selected prism's faces, for arrows on the map} */
+    public ObjectProperty<FaceFlows> faceFlows() {
+        return faceFlows;
     }
 
     /** {@return what a pane asks of the map; whoever meets it sets it back to none} */

@@ -117,7 +117,7 @@ public final class WelcomeView extends StackPane {
         if (!place.lead().isEmpty()) {
             Label lead = new Label(place.lead());
             lead.setWrapText(true);
-            lead.setMinHeight(USE_PREF_SIZE);
+            lead.setPrefWidth(CARD_WIDTH);
             words.getChildren().add(lead);
         }
         Label where = new Label(place.folder().toString());

@@ -25,7 +25,7 @@ import org.seepledger.desktop.welcome.WelcomeView;
 import org.seepledger.desktop.words.Words;
 
 /** Puts the window together. */
-final class Workbench {
+final class Assembly {
 
     private final Outside outside;
     private final Session session = new Session();
@@ -37,7 +37,7 @@ final class Workbench {
     /** What the window asks of the machine. */
     record Outside(Tasks tasks, FileDialogs dialogs, Questions questions, CopyBoard copies, RecentFolders folders) {}
 
-    Workbench(Outside outside, List<Path> samplePlaces) {
+    Assembly(Outside outside, List<Path> samplePlaces) {
         this.outside = outside;
         this.welcome = new WelcomeModel(outside.tasks(), outside.dialogs(), outside.folders(), this::show);
         Actions actions = new Actions();
@@ -66,8 +66,8 @@ final class Workbench {
                 new Action(window, "action.caution", "Shift+F1", view::showCaution),
                 new Action(time, "action.later", "Period", () -> shell.move(1)),
                 new Action(time, "action.earlier", "Comma", () -> shell.move(-1)),
-                new Action(time, "action.deeper", "Page_Down", () -> shell.sink(1)),
-                new Action(time, "action.higher", "Page_Up", () -> shell.sink(-1)));
+                new Action(time, "action.deeper", "Page Down", () -> shell.sink(1)),
+                new Action(time, "action.higher", "Page Up", () -> shell.sink(-1)));
     }
 
     private void show(Opening opening) {
