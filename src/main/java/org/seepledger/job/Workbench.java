@@ -163,7 +163,9 @@ public final class Workbench implements AutoCloseable {
                 aquifer(), kept::around, Span.only(interval), admitted, WellRule.POINT, threads(), progress);
         Period period = periods(Periods.Every.INTERVAL, 1).get(interval);
         PeriodBudget budget = balance.ledgers().get(0).budget(period);
-        return new IntervalBudget(prism, interval, budget, balance.whereabouts().get(0), notes);
+        double area = balance.cuts().get(0).area();
+        return new IntervalBudget(
+                prism, area, interval, budget, balance.whereabouts().get(0), notes);
     }
 
     /**
