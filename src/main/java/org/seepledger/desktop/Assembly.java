@@ -7,6 +7,7 @@ import javafx.scene.Scene;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.desktop.action.Action;
 import org.seepledger.desktop.action.Actions;
+import org.seepledger.desktop.folio.Folio;
 import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.port.Questions;
@@ -41,14 +42,16 @@ final class Assembly {
         this.outside = outside;
         this.welcome = new WelcomeModel(outside.tasks(), outside.dialogs(), outside.folders(), this::show);
         Actions actions = new Actions();
+        Folio folio = new Folio(session, outside.tasks(), outside.copies(), shell.theme());
         Slots slots = new Slots(
                 new WelcomeView(welcome),
                 new javafx.scene.layout.Region(),
                 new javafx.scene.layout.Region(),
-                Optional.empty(),
-                Optional.empty());
+                Optional.of(folio.pages()),
+                Optional.of(folio.ribbon()));
         this.view = new ShellView(shell, slots, actions);
         actions.add(actionsOfWindow());
+        actions.add(folio.actions());
         this.scene = new Scene(view, 1280, 800);
         Dress.put(scene, shell.theme());
         welcome.look(samplePlaces);

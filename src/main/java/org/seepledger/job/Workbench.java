@@ -22,6 +22,7 @@ import org.seepledger.io.aquifer.AquiferReader;
 import org.seepledger.io.crs.PlanCrs;
 import org.seepledger.io.prisms.PrismsReader;
 import org.seepledger.io.prisms.SurfaceRasters;
+import org.seepledger.io.result.Provenance;
 import org.seepledger.io.result.ResultUnits;
 import org.seepledger.ledger.Period;
 import org.seepledger.ledger.PeriodBudget;
@@ -91,6 +92,13 @@ public final class Workbench implements AutoCloseable {
      */
     public List<String> notes() {
         return folder.notes();
+    }
+
+    /**
+     * {@return what the set states of where its terms come from: of flow, of storage if there is any, then of each source}
+     */
+    public List<Provenance> origins() {
+        return folder.origins();
     }
 
     /**

@@ -27,21 +27,6 @@ public record Line(Group group, String item, int layer, double inflow, double ou
     }
 
     /**
-     * {@return a line for each item, over all layers}
-     *
-     * @param entries the entries
-     */
-    public static List<Line> byItem(List<Entry> entries) {
-        Map<List<Object>, Line> lines = new LinkedHashMap<>();
-        for (Entry entry : entries) {
-            Account account = entry.account();
-            Line line = new Line(account.group(), account.item(), ALL_LAYERS, entry.inflow(), entry.outflow());
-            lines.merge(List.of(account.group(), account.item()), line, Line::plus);
-        }
-        return List.copyOf(lines.values());
-    }
-
-    /**
      * {@return a line for each group and layer, over all items whose numbers can be given}
      *
      * @param entries the entries

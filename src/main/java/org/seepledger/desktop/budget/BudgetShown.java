@@ -2,6 +2,7 @@ package org.seepledger.desktop.budget;
 
 import java.util.List;
 import java.util.Optional;
+import org.seepledger.balance.Periods;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.job.IntervalBudget;
@@ -53,6 +54,26 @@ public record BudgetShown(Prism prism, double area, PeriodBudget budget, List<St
         return Words.of("budget.elevations");
     }
 
+    /**
+     * {@return the budget of a prism over the whole record}
+     *
+     * @param set the set
+     * @param known what is known of the record
+     * @param prism the prism's place among its prisms
+     */
+    public static BudgetShown whole(OpenSet set, RecordBudget known, int prism) {
+        Period record = set.workbench().periods(Periods.Every.RECORD, 1).get(0);
+        return of(known, prism, record);
+    }
+
+    private static BudgetShown of(RecordBudget known, int prism, Period period) {
+        return new BudgetShown(
+                known.prisms().get(prism),
+                known.balance().cuts().get(prism).area(),
+                known.balance().ledgers().get(prism).budget(period),
+                known.notes());
+    }
+
     static BudgetShown of(IntervalBudget known) {
         return new BudgetShown(known.prism(), known.area(), known.budget(), known.notes());
     }
@@ -60,11 +81,7 @@ public record BudgetShown(Prism prism, double area, PeriodBudget budget, List<St
     static Optional<BudgetShown> of(RecordBudget known, String prism, Period period) {
         for (int i = 0; i < known.prisms().size(); i++) {
             if (known.prisms().get(i).name().equals(prism)) {
-                return Optional.of(new BudgetShown(
-                        known.prisms().get(i),
-                        known.balance().cuts().get(i).area(),
-                        known.balance().ledgers().get(i).budget(period),
-                        known.notes()));
+                return Optional.of(of(known, i, period));
             }
         }
         return Optional.empty();

@@ -10,9 +10,9 @@ import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.io.result.ResultUnits;
 import org.seepledger.ledger.Group;
-import org.seepledger.ledger.Line;
 import org.seepledger.ledger.Period;
 import org.seepledger.prism.Prism;
+import org.seepledger.report.Term;
 
 /** Tells the map what flows through the selected prism's sides in the interval looked at. */
 public final class FaceFeed {
@@ -22,7 +22,7 @@ public final class FaceFeed {
     private final Reading reading;
 
     /**
-     * Begins to tell.
+     * Prepares to tell.
      *
      * @param session what the window looks at
      * @param live the budgets
@@ -32,6 +32,10 @@ public final class FaceFeed {
         this.session = session;
         this.live = live;
         this.reading = reading;
+    }
+
+    /** Begins to tell. */
+    public void begin() {
         live.known().addListener((known, before, after) -> tell());
         session.selected().addListener((selected, before, after) -> tell());
         session.interval().addListener((interval, before, after) -> tell());
@@ -51,9 +55,9 @@ public final class FaceFeed {
         return live.known().get().budget(prism, interval).map(shown -> {
             ResultUnits units = reading.inUse(set);
             Map<String, Double> net = new LinkedHashMap<>();
-            for (Line line : Line.byItem(shown.budget().entries())) {
-                if (line.group() == Group.SIDE) {
-                    net.put(line.item(), line.net() / interval.duration() * units.rateFactor());
+            for (Term term : Term.of(shown.budget())) {
+                if (term.group() == Group.SIDE) {
+                    net.put(term.item(), term.net() / interval.duration() * units.rateFactor());
                 }
             }
             long revision = shown.prism().equals(prism) ? drawing.revision() : drawing.revision() - 1;

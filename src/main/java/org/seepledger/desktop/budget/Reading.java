@@ -21,6 +21,8 @@ import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.io.result.ResultUnits;
 import org.seepledger.ledger.Period;
+import org.seepledger.picture.UnitShown;
+import org.seepledger.report.Wording;
 import org.seepledger.unit.Measure;
 
 /** How the figures of all panes are to be read: over which period, as rates or volumes, in which unit. */
@@ -143,6 +145,24 @@ public final class Reading {
         return (volumes.get() ? units.volume() : units.rate()).toString();
     }
 
+    /** {@return the unit shown, for charts} */
+    public UnitShown ofCharts(OpenSet set) {
+        ResultUnits units = inUse(set);
+        Wording words = Wording.typeset(units);
+        return volumes.get()
+                ? new UnitShown(words.unit(units.volume()), units.volumeFactor(), false)
+                : new UnitShown(words.unit(units.rate()), units.rateFactor(), true);
+    }
+
+    /**
+     * {@return all periods of the length chosen}
+     *
+     * @param set the set
+     */
+    public List<Period> periods(OpenSet set) {
+        return set.workbench().periods(every.get(), waterYearStart.get());
+    }
+
     /**
      * {@return the period that holds the middle of an interval}
      *
@@ -150,10 +170,9 @@ public final class Reading {
      * @param interval the interval, from 0
      */
     public Period period(OpenSet set, int interval) {
-        List<Period> periods = set.workbench().periods(every.get(), waterYearStart.get());
         double middle = set.aquifer().times().instant(interval)
                 + set.aquifer().times().length(interval) / 2;
-        return periods.stream()
+        return periods(set).stream()
                 .filter(period -> middle >= period.from() && middle < period.to())
                 .findFirst()
                 .orElseThrow();

@@ -9,6 +9,7 @@ import org.seepledger.ledger.Line;
 import org.seepledger.ledger.PeriodBudget;
 import org.seepledger.ledger.Total;
 import org.seepledger.ledger.Totals;
+import org.seepledger.report.Term;
 
 /** Lays a budget out in rows. */
 final class LedgerRows {
@@ -36,12 +37,16 @@ final class LedgerRows {
 
     List<LedgerRow> arranged(Arrangement arrangement) {
         switch (arrangement) {
-            case ITEMS -> sections(Line.byItem(budget.entries()));
+            case ITEMS -> sections(Term.of(budget).stream().map(LedgerRows::line).toList());
             case ITEMS_BY_LAYER -> sections(Line.each(budget.entries()));
             case LAYERS -> layers(Line.byLayer(budget.entries()));
         }
         totals();
         return rows;
+    }
+
+    private static Line line(Term term) {
+        return new Line(term.group(), term.item(), Line.ALL_LAYERS, term.inflow(), term.outflow());
     }
 
     private void sections(List<Line> lines) {
