@@ -84,8 +84,16 @@ public final class Wording {
      * @param unit the unit
      */
     public String unit(Measure unit) {
-        String text = unit.toString();
-        return raised ? text.replaceAll("(?<=[A-Za-z])2\\b", "²").replaceAll("(?<=[A-Za-z])3\\b", "³") : text;
+        return raised ? typeset(unit) : unit.toString();
+    }
+
+    /**
+     * {@return a unit with its powers raised}
+     *
+     * @param unit the unit
+     */
+    public static String typeset(Measure unit) {
+        return unit.toString().replaceAll("(?<=[A-Za-z])2\\b", "²").replaceAll("(?<=[A-Za-z])3\\b", "³");
     }
 
     /**

@@ -63,6 +63,11 @@ public final class ExchangeModel {
         return belongs.getReadOnlyProperty();
     }
 
+    /** Asks the map to begin a prism. */
+    public void draw() {
+        live.draw();
+    }
+
     /** {@return which state the pane is in} */
     public ReadOnlyObjectProperty<PaneState> state() {
         return live.record();

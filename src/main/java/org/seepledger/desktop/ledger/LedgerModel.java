@@ -32,6 +32,7 @@ public final class LedgerModel {
     private final CopyBoard copies;
     private final ObservableList<LedgerRow> rows = FXCollections.observableArrayList();
     private final ReadOnlyStringWrapper belongs = new ReadOnlyStringWrapper("");
+    private final ReadOnlyStringWrapper notes = new ReadOnlyStringWrapper("");
     private final ReadOnlyStringWrapper unit = new ReadOnlyStringWrapper("");
     private final ReadOnlyObjectWrapper<PaneState> state = new ReadOnlyObjectWrapper<>(PaneState.READY);
     private final ObjectProperty<Arrangement> arrangement = new SimpleObjectProperty<>(Arrangement.ITEMS);
@@ -69,6 +70,16 @@ public final class LedgerModel {
     /** {@return which geometry and time the rows belong to} */
     public ReadOnlyStringProperty belongs() {
         return belongs.getReadOnlyProperty();
+    }
+
+    /** {@return what was done to the prism before it was balanced; empty for nothing} */
+    public ReadOnlyStringProperty notes() {
+        return notes.getReadOnlyProperty();
+    }
+
+    /** Asks the map to begin a prism. */
+    public void draw() {
+        live.draw();
     }
 
     /** {@return the unit of the numbers} */
@@ -171,11 +182,13 @@ public final class LedgerModel {
                 .arranged(arrangement.get()));
         unit.set(reading.unitShown(set));
         belongs.set(shown.whose(set));
+        notes.set(String.join(" ", shown.notes()));
     }
 
     private void clear() {
         rows.clear();
         belongs.set("");
+        notes.set("");
     }
 
     private void showState() {

@@ -42,7 +42,7 @@ final class NumberCell extends TableCell<LedgerRow, LedgerRow> {
             return "";
         }
         return row.kind() == LedgerRow.Kind.PERCENTAGE
-                ? Figures.percent(value).replace('-', '−')
-                : Figures.typeset(value);
+                ? Figures.typesetPercent(value)
+                : Figures.tabular(value);
     }
 }
