@@ -153,12 +153,12 @@ class LedgerModelTest {
     @Test
     void numbersOfOneColumnHaveFourDigitsAndOneSign() {
         LedgerRow row = new LedgerRow(Kind.ENTRY, Group.SIDE, "a", 0, "a", 780, 0.5, -1234.5);
-        assertThat(NumberCell.text(row, row.inflow())).isEqualTo("780.0");
-        assertThat(NumberCell.text(row, row.outflow())).isEqualTo("0.5000");
-        assertThat(NumberCell.text(row, row.net())).isEqualTo("−1\u202f234");
-        assertThat(NumberCell.text(row, Double.NaN)).isEqualTo("–");
+        assertThat(row.text(row.inflow())).isEqualTo("780.0");
+        assertThat(row.text(row.outflow())).isEqualTo("0.5000");
+        assertThat(row.text(row.net())).isEqualTo("−1\u202f234");
+        assertThat(row.text(Double.NaN)).isEqualTo("–");
         LedgerRow total = new LedgerRow(Kind.TOTAL, Group.TOTAL, "a", -1, "a", Double.NaN, Double.NaN, 3);
-        assertThat(NumberCell.text(total, total.inflow())).isEmpty();
-        assertThat(NumberCell.text(total, total.net())).isEqualTo("3.000");
+        assertThat(total.text(total.inflow())).isEmpty();
+        assertThat(total.text(total.net())).isEqualTo("3.000");
     }
 }
