@@ -9,6 +9,8 @@ import java.util.List;
  */
 public final class Labels {
 
+    private static final double GAP = 1.5;
+
     private final Box frame;
     private final List<Box> taken = new ArrayList<>();
 
@@ -39,7 +41,7 @@ public final class Labels {
      */
     public boolean place(List<Mark.Text> choices, List<Mark> marks) {
         for (Mark.Text choice : choices) {
-            Box box = Lettering.box(choice);
+            Box box = Lettering.box(choice).inset(-GAP);
             if (frame.holds(box) && taken.stream().noneMatch(box::meets)) {
                 taken.add(box);
                 marks.add(choice);

@@ -1,5 +1,9 @@
 package org.seepledger.picture;
 
+import java.util.Arrays;
+import org.seepledger.aquifer.Grid;
+import org.seepledger.aquifer.Window;
+
 /**
  * Where map coordinates come to in a picture: north up, the same scale along both axes.
  *
@@ -60,6 +64,31 @@ public record MapFrame(Box box, double west, double north, double scale) {
      */
     public double mapY(double y) {
         return north - (y - box.y()) / scale;
+    }
+
+    /**
+     * {@return the cells that the frame shows, at least one; cells beyond the frame's corners may be among them}
+     *
+     * @param grid the grid
+     */
+    public Window window(Grid grid) {
+        double[] x = new double[4];
+        double[] y = new double[4];
+        for (int corner = 0; corner < 4; corner++) {
+            double cornerX = corner % 2 == 0 ? west : east();
+            double cornerY = corner < 2 ? south() : north;
+            x[corner] = grid.localX(cornerX, cornerY);
+            y[corner] = grid.localY(cornerX, cornerY);
+        }
+        Arrays.sort(x);
+        Arrays.sort(y);
+        int column = grid.x().nearest(x[0]);
+        int row = grid.flipped(grid.y().nearest(y[3]));
+        return new Window(
+                row,
+                column,
+                grid.flipped(grid.y().nearest(y[0])) - row + 1,
+                grid.x().nearest(x[3]) - column + 1);
     }
 
     /** {@return the map x at the box's right edge} */

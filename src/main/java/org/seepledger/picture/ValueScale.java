@@ -11,6 +11,8 @@ import java.util.stream.DoubleStream;
  */
 public record ValueScale(Ramp ramp, double from, double to) {
 
+    private static final double SHOWN = 0.98;
+
     /** Refuses an empty range. */
     public ValueScale {
         if (!(to > from)) {
@@ -32,13 +34,15 @@ public record ValueScale(Ramp ramp, double from, double to) {
     }
 
     /**
-     * {@return a scale that has 0 in its middle}
+     * {@return a scale that has 0 in its middle and ends at the size that only one in fifty values exceeds, so that a few
+     * extremes do not bleach the rest}
      *
      * @param values the values; those that are not finite do not count
      */
     public static ValueScale aboutZero(double[] values) {
-        double greatest = finite(values).map(Math::abs).max().orElse(0);
-        double end = greatest > 0 ? greatest : 1;
+        double[] sizes = finite(values).map(Math::abs).sorted().toArray();
+        double most = sizes.length == 0 ? 0 : sizes[(int) (SHOWN * (sizes.length - 1))];
+        double end = most > 0 ? most : sizes.length > 0 && sizes[sizes.length - 1] > 0 ? sizes[sizes.length - 1] : 1;
         return new ValueScale(Ramp.SWING, -end, end);
     }
 
@@ -47,11 +51,13 @@ public record ValueScale(Ramp ramp, double from, double to) {
     }
 
     /**
-     * {@return the colour of a value, opaque; nothing for one that is not finite}
+     * {@return the colour of a value: alpha, red, green and blue, eight bits each; nothing for one that is not finite}
      *
      * @param value the value
+     * @param opacity from 0 to 1
      */
-    public int argb(double value) {
-        return Double.isFinite(value) ? 0xff000000 | ramp.rgb((value - from) / (to - from)) : 0;
+    public int argb(double value, double opacity) {
+        int alpha = (int) Math.round(255 * opacity);
+        return Double.isFinite(value) ? alpha << 24 | ramp.rgb((value - from) / (to - from)) : 0;
     }
 }
