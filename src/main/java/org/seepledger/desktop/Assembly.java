@@ -7,6 +7,9 @@ import javafx.scene.Scene;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.desktop.action.Action;
 import org.seepledger.desktop.action.Actions;
+import org.seepledger.desktop.map.MapModel;
+import org.seepledger.desktop.map.MapView;
+import org.seepledger.desktop.map.ShowingBar;
 import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.port.Questions;
@@ -31,6 +34,7 @@ final class Assembly {
     private final Session session = new Session();
     private final ShellModel shell = new ShellModel(session);
     private final WelcomeModel welcome;
+    private final MapModel map;
     private final ShellView view;
     private final Scene scene;
 
@@ -39,16 +43,15 @@ final class Assembly {
 
     Assembly(Outside outside, List<Path> samplePlaces) {
         this.outside = outside;
+        this.map = new MapModel(session, outside.tasks());
         this.welcome = new WelcomeModel(outside.tasks(), outside.dialogs(), outside.folders(), this::show);
         Actions actions = new Actions();
-        Slots slots = new Slots(
-                new WelcomeView(welcome),
-                new javafx.scene.layout.Region(),
-                new javafx.scene.layout.Region(),
-                Optional.empty(),
-                Optional.empty());
+        MapView mapView = new MapView(map, outside.tasks(), shell.theme());
+        Slots slots =
+                new Slots(new WelcomeView(welcome), new ShowingBar(map), mapView, Optional.empty(), Optional.empty());
         this.view = new ShellView(shell, slots, actions);
         actions.add(actionsOfWindow());
+        actions.add(mapView.actions());
         this.scene = new Scene(view, 1280, 800);
         Dress.put(scene, shell.theme());
         welcome.look(samplePlaces);
@@ -113,6 +116,10 @@ final class Assembly {
 
     ShellModel shell() {
         return shell;
+    }
+
+    MapModel map() {
+        return map;
     }
 
     WelcomeModel welcome() {

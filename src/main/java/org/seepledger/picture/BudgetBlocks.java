@@ -73,8 +73,7 @@ public final class BudgetBlocks {
         return new Picture(
                 width,
                 sheet.height(),
-                "Gains, losses and storage of " + prism + ", "
-                        + budget.period().name(),
+                "Gains, losses and storage of " + prism + ", " + budget.period().name(),
                 description(),
                 sheet.marks());
     }
@@ -89,8 +88,8 @@ public final class BudgetBlocks {
         double most = Math.max(gains + Math.max(0, -known(storage)), losses + Math.max(0, known(storage)));
         if (Double.isNaN(storage)) {
             double gap = gains - losses;
-            return List.of(new Block(
-                    "not explained", gap, most, losses, gains, Ink.Token.RESIDUAL, Mark.Texture.PLAIN));
+            return List.of(
+                    new Block("not explained", gap, most, losses, gains, Ink.Token.RESIDUAL, Mark.Texture.PLAIN));
         }
         String verb = storage < 0 ? "storage gives" : "storage takes";
         double level = losses + storage;
@@ -129,7 +128,8 @@ public final class BudgetBlocks {
     }
 
     private String description() {
-        return equation() + largest(" The largest gains: ", slices.gains())
+        return equation()
+                + largest(" The largest gains: ", slices.gains())
                 + largest(" The largest losses: ", slices.losses());
     }
 

@@ -46,11 +46,7 @@ public record Camera(double width, double height, double centreX, double centreY
         double zoomed = limits.within(scale * factor);
         double shrink = 1 / scale - 1 / zoomed;
         return new Camera(
-                width,
-                height,
-                centreX + (x - width / 2) * shrink,
-                centreY - (y - height / 2) * shrink,
-                zoomed);
+                width, height, centreX + (x - width / 2) * shrink, centreY - (y - height / 2) * shrink, zoomed);
     }
 
     /** {@return the view after the map was dragged by some pixels} */

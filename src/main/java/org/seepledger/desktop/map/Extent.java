@@ -24,9 +24,9 @@ record Extent(double west, double south, double east, double north) {
     }
 
     static Extent of(Prism prism) {
-        var sides = prism.rings().stream().flatMap(ring -> ring.sides().stream()).toList();
-        return over(
-                sides.stream().mapToDouble(Side::x), sides.stream().mapToDouble(Side::y));
+        var sides =
+                prism.rings().stream().flatMap(ring -> ring.sides().stream()).toList();
+        return over(sides.stream().mapToDouble(Side::x), sides.stream().mapToDouble(Side::y));
     }
 
     private static Extent over(DoubleStream x, DoubleStream y) {

@@ -43,8 +43,10 @@ final class FluxModel {
     private void refresh() {
         Optional<Request> wanted = session.set()
                 .get()
-                .filter(set -> map.overlays().arrows().get() && map.camera().get().width() > 0)
-                .map(set -> new Request(set, session.layer().get(), session.interval().get(), stride(set)));
+                .filter(set ->
+                        map.overlays().arrows().get() && map.camera().get().width() > 0)
+                .map(set -> new Request(
+                        set, session.layer().get(), session.interval().get(), stride(set)));
         if (wanted.equals(asked)) {
             return;
         }
@@ -70,8 +72,7 @@ final class FluxModel {
     private int stride(OpenSet set) {
         Grid grid = set.aquifer().grid();
         double mean = Math.min(
-                grid.x().edge(grid.columns()) / grid.columns(),
-                grid.y().edge(grid.rows()) / grid.rows());
+                grid.x().edge(grid.columns()) / grid.columns(), grid.y().edge(grid.rows()) / grid.rows());
         double cell = mean * map.camera().get().scale();
         int stride = 1;
         while (stride * cell < APART && stride < Math.max(grid.columns(), grid.rows())) {

@@ -27,6 +27,7 @@ public final class MapModel {
     private final ReadOnlyObjectWrapper<List<WellPlace>> wells = new ReadOnlyObjectWrapper<>(List.of());
     private final ValuesModel values;
     private final FluxModel flux;
+    private final ContourModel contours;
     private boolean framed;
 
     /**
@@ -38,6 +39,7 @@ public final class MapModel {
     public MapModel(Session session, Tasks tasks) {
         this.session = session;
         this.values = new ValuesModel(session, tasks);
+        this.contours = new ContourModel(values, overlays, tasks);
         this.flux = new FluxModel(session, this, tasks);
         session.set().addListener((set, before, after) -> {
             framed = false;
@@ -49,7 +51,8 @@ public final class MapModel {
 
     private void findWells() {
         int interval = session.interval().get();
-        wells.set(session.set().get().map(set -> set.workbench().wells(interval)).orElse(List.of()));
+        wells.set(
+                session.set().get().map(set -> set.workbench().wells(interval)).orElse(List.of()));
     }
 
     /**
@@ -172,6 +175,10 @@ public final class MapModel {
 
     FluxModel flux() {
         return flux;
+    }
+
+    ContourModel contours() {
+        return contours;
     }
 
     ReadOnlyObjectProperty<List<WellPlace>> wells() {

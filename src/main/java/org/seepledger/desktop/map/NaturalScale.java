@@ -14,7 +14,8 @@ final class NaturalScale {
     private NaturalScale() {}
 
     static ValueScale of(MapQuantity quantity, double[] values) {
-        double[] sorted = DoubleStream.of(values).filter(Double::isFinite).sorted().toArray();
+        double[] sorted =
+                DoubleStream.of(values).filter(Double::isFinite).sorted().toArray();
         return switch (quantity.kind()) {
             case IMBALANCE -> ValueScale.aboutZero(sorted);
             case FLUX -> ValueScale.over(Arrays.copyOf(sorted, (int) Math.ceil(SHARE * sorted.length)));

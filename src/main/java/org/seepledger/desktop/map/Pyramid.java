@@ -2,6 +2,7 @@ package org.seepledger.desktop.map;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.seepledger.aquifer.Axis;
 
 /**
  * Values on a lattice, and the same reduced to half the rows and columns again and again: the mean of those of four that
@@ -83,6 +84,20 @@ final class Pyramid {
             levels.add(last);
         }
         return new Pyramid(lattice, levels);
+    }
+
+    /** The values of a row of cells, west to east; of an uneven grid those of the texels in the middle of cells. */
+    double[] cells(int row) {
+        Axis x = lattice.grid().x();
+        Axis y = lattice.grid().y();
+        int fromSouth = lattice.grid().flipped(row);
+        int texelRow = lattice.rows() - 1 - (int) ((y.edge(fromSouth) + y.size(fromSouth) / 2) / lattice.stepY());
+        double[] values = new double[x.count()];
+        for (int column = 0; column < values.length; column++) {
+            int texel = (int) ((x.edge(column) + x.size(column) / 2) / lattice.stepX());
+            values[column] = levels.get(0).at(texelRow, texel);
+        }
+        return values;
     }
 
     Lattice lattice() {

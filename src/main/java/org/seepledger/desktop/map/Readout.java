@@ -26,7 +26,8 @@ public record Readout(String place, String cell, String value) {
             return new Readout(place, Words.of("map.off"), "");
         }
         String cell = Words.of("map.cell", grid.flipped(fromSouth) + 1, column + 1, layer + 1);
-        return new Readout(place, cell, view.map(shown -> value(shown, grid, x, y)).orElse(""));
+        return new Readout(
+                place, cell, view.map(shown -> value(shown, grid, x, y)).orElse(""));
     }
 
     private static String value(LayerView shown, Grid grid, double x, double y) {
@@ -38,7 +39,11 @@ public record Readout(String place, String cell, String value) {
         String label = shown.request().quantity().label();
         return Float.isNaN(value)
                 ? Words.of("map.novalue", label)
-                : Words.of("map.value", label, Figures.typeset(value), shown.request().quantity().unit());
+                : Words.of(
+                        "map.value",
+                        label,
+                        Figures.typeset(value),
+                        shown.request().quantity().unit());
     }
 
     /** To a tenth of a plan unit, thousands kept apart. */

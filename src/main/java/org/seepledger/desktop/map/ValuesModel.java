@@ -123,7 +123,9 @@ public final class ValuesModel {
         kept.put(read.request(), read);
         int most = Math.max(
                 1,
-                MOST_TEXELS_KEPT / (read.pyramid().lattice().rows() * read.pyramid().lattice().columns()));
+                MOST_TEXELS_KEPT
+                        / (read.pyramid().lattice().rows()
+                                * read.pyramid().lattice().columns()));
         while (kept.size() > most) {
             kept.remove(kept.keySet().iterator().next());
         }
@@ -151,7 +153,8 @@ public final class ValuesModel {
             session.status().set(Words.of("map.range.refused"));
             return false;
         }
-        view.get().ifPresent(shown -> colour(shown, new ValueScale(shown.natural().ramp(), from, to)));
+        view.get()
+                .ifPresent(shown -> colour(shown, new ValueScale(shown.natural().ramp(), from, to)));
         return true;
     }
 

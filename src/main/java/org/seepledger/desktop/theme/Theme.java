@@ -26,7 +26,8 @@ public enum Theme {
     /** The inks as looked-up colours of the style sheet, {@code -sl-gain} and so on. */
     String inks() {
         return Arrays.stream(Ink.Token.values())
-                .map(token -> "-sl-" + token.name().toLowerCase(Locale.ROOT) + ": " + palette().colour(token) + ";")
+                .map(token -> "-sl-" + token.name().toLowerCase(Locale.ROOT) + ": "
+                        + palette().colour(token) + ";")
                 .collect(Collectors.joining(" "));
     }
 
