@@ -8,6 +8,9 @@ import org.seepledger.aquifer.Aquifer;
 import org.seepledger.desktop.action.Action;
 import org.seepledger.desktop.action.Actions;
 import org.seepledger.desktop.folio.Folio;
+import org.seepledger.desktop.map.MapModel;
+import org.seepledger.desktop.map.MapView;
+import org.seepledger.desktop.map.ShowingBar;
 import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.port.Questions;
@@ -32,6 +35,7 @@ final class Assembly {
     private final Session session = new Session();
     private final ShellModel shell = new ShellModel(session);
     private final WelcomeModel welcome;
+    private final MapModel map;
     private final ShellView view;
     private final Scene scene;
 
@@ -40,17 +44,20 @@ final class Assembly {
 
     Assembly(Outside outside, List<Path> samplePlaces) {
         this.outside = outside;
+        this.map = new MapModel(session, outside.tasks());
         this.welcome = new WelcomeModel(outside.tasks(), outside.dialogs(), outside.folders(), this::show);
         Actions actions = new Actions();
+        MapView mapView = new MapView(map, outside.tasks(), shell.theme());
         Folio folio = new Folio(session, outside.tasks(), outside.copies(), shell.theme());
         Slots slots = new Slots(
                 new WelcomeView(welcome),
-                new javafx.scene.layout.Region(),
-                new javafx.scene.layout.Region(),
+                new ShowingBar(map),
+                mapView,
                 Optional.of(folio.pages()),
                 Optional.of(folio.ribbon()));
         this.view = new ShellView(shell, slots, actions);
         actions.add(actionsOfWindow());
+        actions.add(mapView.actions());
         actions.add(folio.actions());
         this.scene = new Scene(view, 1280, 800);
         Dress.put(scene, shell.theme());
@@ -116,6 +123,10 @@ final class Assembly {
 
     ShellModel shell() {
         return shell;
+    }
+
+    MapModel map() {
+        return map;
     }
 
     WelcomeModel welcome() {

@@ -3,21 +3,11 @@ package org.seepledger.desktop.paint;
 import javafx.scene.paint.Color;
 import org.seepledger.desktop.theme.Theme;
 import org.seepledger.picture.Ink;
-import org.seepledger.picture.Palette;
 
 /** The colours of inks in a theme. */
 public final class Paints {
 
     private Paints() {}
-
-    /**
-     * {@return the palette of a theme}
-     *
-     * @param theme the theme
-     */
-    public static Palette palette(Theme theme) {
-        return theme == Theme.LIGHT ? Palette.LIGHT : Palette.DARK;
-    }
 
     /**
      * {@return an ink's colour}
@@ -27,7 +17,7 @@ public final class Paints {
      * @param theme the theme
      */
     public static Color of(Ink ink, double opacity, Theme theme) {
-        int rgb = palette(theme).colour(ink).value();
+        int rgb = theme.palette().colour(ink).value();
         return Color.rgb(rgb >> 16 & 0xff, rgb >> 8 & 0xff, rgb & 0xff, opacity);
     }
 }

@@ -34,5 +34,6 @@ public final class Dress {
                         : new PrimerDark().getUserAgentStylesheet());
         root.getStyleClass().removeAll(Theme.LIGHT.styleClass(), Theme.DARK.styleClass());
         root.getStyleClass().add(theme.styleClass());
+        root.setStyle(theme.inks());
     }
 }
