@@ -119,7 +119,7 @@ public final class ChartModel {
                     ledger.prism(),
                     periods.stream().map(ledger::budget).toList(),
                     set.aquifer().times(),
-                    reading.ofCharts(set),
+                    reading.shown(set),
                     marked(periods),
                     Math.max(300, width),
                     height);

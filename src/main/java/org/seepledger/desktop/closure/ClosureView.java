@@ -102,7 +102,7 @@ public final class ClosureView extends BorderPane {
         Region gap = new Region();
         HBox.setHgrow(gap, Priority.ALWAYS);
         Label imbalance = new Label(spot.imbalance());
-        imbalance.getStyleClass().add("sl-number");
+        imbalance.getStyleClass().add("sl-figure");
         return new HBox(8, way, gap, imbalance);
     }
 

@@ -51,7 +51,10 @@ public final class ExchangeView extends BorderPane {
         HBox top = new HBox(belongs, gap, copy);
         top.getStyleClass().add("sl-choices");
         setTop(top);
-        VBox sheet = new VBox(16, diagram, matrix);
+        ScrollPane across = new ScrollPane(matrix);
+        across.setVbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
+        across.setMinHeight(USE_PREF_SIZE);
+        VBox sheet = new VBox(16, diagram, across);
         sheet.getStyleClass().add("sl-answers");
         ScrollPane scroll = new ScrollPane(sheet);
         scroll.setFitToWidth(true);
@@ -73,7 +76,7 @@ public final class ExchangeView extends BorderPane {
             matrix.add(end(styled(flows.names().get(i), "sl-matrix-head")), i + 1, 0);
             matrix.add(styled(flows.names().get(i), "sl-matrix-head"), 0, i + 1);
             for (int receiver = 0; receiver < count; receiver++) {
-                matrix.add(end(styled(flows.text(i, receiver), "sl-number")), receiver + 1, i + 1);
+                matrix.add(end(styled(flows.text(i, receiver), "sl-figure")), receiver + 1, i + 1);
             }
         }
     }

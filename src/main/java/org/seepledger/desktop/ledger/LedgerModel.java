@@ -1,5 +1,6 @@
 package org.seepledger.desktop.ledger;
 
+import java.util.List;
 import java.util.Optional;
 import java.util.stream.DoubleStream;
 import javafx.beans.property.ObjectProperty;
@@ -176,11 +177,10 @@ public final class LedgerModel {
     }
 
     private void show(OpenSet set, BudgetShown shown) {
-        Period period = shown.budget().period();
-        var layers = set.aquifer().layers().stream().map(Layer::name).toList();
-        rows.setAll(new LedgerRows(shown.budget(), layers, reading.factor(set, period), order.get())
+        List<String> layers = set.aquifer().layers().stream().map(Layer::name).toList();
+        rows.setAll(new LedgerRows(shown.budget(), layers, reading.shown(set), order.get())
                 .arranged(arrangement.get()));
-        unit.set(reading.unitShown(set));
+        unit.set(reading.unitName(set));
         belongs.set(shown.whose(set));
         notes.set(String.join(" ", shown.notes()));
     }

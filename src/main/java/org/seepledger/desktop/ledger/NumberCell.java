@@ -26,7 +26,7 @@ final class NumberCell extends TableCell<LedgerRow, LedgerRow> {
 
     private NumberCell(Value value) {
         this.value = value;
-        getStyleClass().add("sl-number");
+        getStyleClass().add("sl-figure");
     }
 
     @Override
