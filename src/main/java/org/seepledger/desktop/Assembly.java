@@ -7,6 +7,7 @@ import javafx.scene.Scene;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.desktop.action.Action;
 import org.seepledger.desktop.action.Actions;
+import org.seepledger.desktop.folio.Folio;
 import org.seepledger.desktop.map.MapModel;
 import org.seepledger.desktop.map.MapView;
 import org.seepledger.desktop.map.ShowingBar;
@@ -47,11 +48,17 @@ final class Assembly {
         this.welcome = new WelcomeModel(outside.tasks(), outside.dialogs(), outside.folders(), this::show);
         Actions actions = new Actions();
         MapView mapView = new MapView(map, outside.tasks(), shell.theme());
-        Slots slots =
-                new Slots(new WelcomeView(welcome), new ShowingBar(map), mapView, Optional.empty(), Optional.empty());
+        Folio folio = new Folio(session, outside.tasks(), outside.copies(), shell.theme());
+        Slots slots = new Slots(
+                new WelcomeView(welcome),
+                new ShowingBar(map),
+                mapView,
+                Optional.of(folio.pages()),
+                Optional.of(folio.ribbon()));
         this.view = new ShellView(shell, slots, actions);
         actions.add(actionsOfWindow());
         actions.add(mapView.actions());
+        actions.add(folio.actions());
         this.scene = new Scene(view, 1280, 800);
         Dress.put(scene, shell.theme());
         welcome.look(samplePlaces);

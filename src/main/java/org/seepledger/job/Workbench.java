@@ -22,6 +22,7 @@ import org.seepledger.io.aquifer.AquiferReader;
 import org.seepledger.io.crs.PlanCrs;
 import org.seepledger.io.prisms.PrismsReader;
 import org.seepledger.io.prisms.SurfaceRasters;
+import org.seepledger.io.result.Provenance;
 import org.seepledger.io.result.ResultUnits;
 import org.seepledger.ledger.Period;
 import org.seepledger.ledger.PeriodBudget;
@@ -94,6 +95,13 @@ public final class Workbench implements AutoCloseable {
     }
 
     /**
+     * {@return what the set states of where its terms come from: of flow, of storage if there is any, then of each source}
+     */
+    public List<Provenance> origins() {
+        return folder.origins();
+    }
+
+    /**
      * {@return the periods of its record}
      *
      * @param every how often a budget is struck
@@ -163,7 +171,9 @@ public final class Workbench implements AutoCloseable {
                 aquifer(), kept::around, Span.only(interval), admitted, WellRule.POINT, threads(), progress);
         Period period = periods(Periods.Every.INTERVAL, 1).get(interval);
         PeriodBudget budget = balance.ledgers().get(0).budget(period);
-        return new IntervalBudget(prism, interval, budget, balance.whereabouts().get(0), notes);
+        double area = balance.cuts().get(0).area();
+        return new IntervalBudget(
+                prism, area, interval, budget, balance.whereabouts().get(0), notes);
     }
 
     /**

@@ -29,6 +29,7 @@ final class BlockSheet {
     private final double base;
     private final double lowest;
     private final double scale;
+    private final List<Mark> guides = new ArrayList<>();
     private final List<Mark> marks = new ArrayList<>();
     private final List<Mark> list = new ArrayList<>();
     private double listEnd;
@@ -70,7 +71,7 @@ final class BlockSheet {
             middles.add(draw(piece, x, block));
         }
         outline(x, block, y(0), pieces.isEmpty() ? y(0) : y(pieces.get(0).from()));
-        label(index, title, pieces, middles, x + block);
+        label(index, title, pieces, middles, block);
     }
 
     /** Draws what lies between the height of the losses and that of the gains. */
@@ -99,12 +100,12 @@ final class BlockSheet {
                     y(pieces.get(1).from()),
                     y(pieces.get(1).to()));
         }
-        label(2, "Storage and residual", pieces, middles, x + block);
+        label(2, "Storage and residual", pieces, middles, storageWidth);
         marks.add(line(MARGIN, y(0), width - MARGIN, y(0), Stroke.of(Ink.Token.TEXT, 1)));
     }
 
     private void guide(double from, double to, double level) {
-        marks.add(line(
+        guides.add(line(
                 from, y(level), to, y(level), Stroke.of(Ink.Token.MUTED, 0.8).dashed(3.0, 3.0)));
     }
 
@@ -145,15 +146,17 @@ final class BlockSheet {
         return upper + high / 2;
     }
 
-    private void label(int index, String title, List<Block> pieces, List<Double> middles, double x) {
+    private void label(int index, String title, List<Block> pieces, List<Double> middles, double firstWidth) {
         double half = beside ? 14 : 7;
         double[] wanted = middles.stream().mapToDouble(middle -> middle).toArray();
+        double x = left(index) + block;
         double[] places = Spread.out(wanted, 2 * half, top + half - 4, base - half);
         if (!beside && !pieces.isEmpty()) {
             listTitle(title);
         }
         for (int i = 0; i < places.length; i++) {
-            double[] leader = {x + 1, wanted[i], x + 5, wanted[i], x + 11, places[i], x + 14, places[i]};
+            double from = left(index) + (i == 0 ? firstWidth : block) + 1;
+            double[] leader = {from, wanted[i], x + 5, wanted[i], x + 11, places[i], x + 14, places[i]};
             marks.add(new Mark.Line(leader, Stroke.of(Ink.Token.MUTED, 0.8)));
             if (beside) {
                 writeBeside(pieces.get(i), x + 17, places[i], left(index) + column - 4);
@@ -201,7 +204,8 @@ final class BlockSheet {
     }
 
     List<Mark> marks() {
-        List<Mark> all = new ArrayList<>(marks);
+        List<Mark> all = new ArrayList<>(guides);
+        all.addAll(marks);
         all.addAll(list);
         return all;
     }

@@ -74,28 +74,21 @@ public final class SectionPicture {
      * @param prism the prism
      * @param line the line
      * @param budget the prism's budget over the record
-     * @param factor how many units shown one length³ of the budget is, per time
-     * @param unit the unit shown
+     * @param unit the unit to show
      * @param width in logical pixels
      */
     public static Optional<Picture> of(
-            Aquifer aquifer,
-            Prism prism,
-            SectionLine line,
-            PeriodBudget budget,
-            double factor,
-            String unit,
-            double width) {
+            Aquifer aquifer, Prism prism, SectionLine line, PeriodBudget budget, UnitShown unit, double width) {
         Profile profile = Profile.along(line, aquifer, prism);
         boolean empty = profile.stretches().stream()
                 .allMatch(
                         stretch -> DoubleStream.of(stretch.column().surfaces()).noneMatch(Double::isFinite));
         return empty
                 ? Optional.empty()
-                : Optional.of(new SectionPicture(aquifer, prism, line, profile, width).draw(budget, factor, unit));
+                : Optional.of(new SectionPicture(aquifer, prism, line, profile, width).draw(budget, unit));
     }
 
-    private Picture draw(PeriodBudget budget, double factor, String unit) {
+    private Picture draw(PeriodBudget budget, UnitShown unit) {
         drawLayers();
         drawWater(
                 stretch -> stretch.column().levelAtStart(),
@@ -103,12 +96,12 @@ public final class SectionPicture {
         drawWater(stretch -> stretch.column().levelAtEnd(), Stroke.of(Ink.Token.WATER, 2));
         drawPrism();
         aquifer.placedWells().forEach(this::drawWell);
-        drawLid(budget, "top", factor);
-        drawLid(budget, "bottom", factor);
+        drawLid(budget, "top", unit);
+        drawLid(budget, "bottom", unit);
         marks.add(new Mark.Group(box, inside));
         marks.addAll(over);
         drawAxes();
-        drawKey(unit);
+        drawKey(unit.words());
         return new Picture(
                 box.right() + RIGHT, HEIGHT, "Vertical section through " + prism.name(), description(), marks);
     }
@@ -278,14 +271,14 @@ public final class SectionPicture {
     }
 
     /** The net flow through a lid as an arrow into the body or out of it, in the middle of the longest cut. */
-    private void drawLid(PeriodBudget budget, String lid, double factor) {
+    private void drawLid(PeriodBudget budget, String lid, UnitShown unit) {
         double net = 0;
         boolean known = false;
         for (Entry entry : budget.entries()) {
             boolean ours = entry.account().group() == Group.LID
                     && entry.account().item().equals(lid);
             if (ours && entry.account().quantified()) {
-                net += entry.net();
+                net += unit.of(entry.net(), budget.period());
                 known = true;
             }
         }
@@ -297,8 +290,7 @@ public final class SectionPicture {
         boolean isTop = lid.equals("top");
         double y = y(isTop ? middle.get().top() : middle.get().bottom());
         double reach = (isTop ? -1 : 1) * (net > 0 ? -1 : 1) * 12;
-        String words =
-                lid + ": " + (net == 0 ? "0" : (net > 0 ? "in " : "out ") + Figures.typeset(Math.abs(net) * factor));
+        String words = lid + ": " + (net == 0 ? "0" : (net > 0 ? "in " : "out ") + Figures.typeset(Math.abs(net)));
         Ink ink = net > 0 ? Ink.Token.GAIN : net < 0 ? Ink.Token.LOSS : Ink.Token.MUTED;
         if (net != 0) {
             Fill fill = net > 0 ? Fill.of(ink) : new Fill(ink, 1, Mark.Texture.RISING);

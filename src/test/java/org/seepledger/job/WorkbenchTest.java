@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import java.io.IOException;
 import java.nio.file.Path;
+import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -82,7 +83,8 @@ class WorkbenchTest {
                         WellRule.POINT,
                         true,
                         2,
-                        false),
+                        false,
+                        ReportRequest.dated(LocalDate.of(2024, 5, 31))),
                 Progress.NONE);
         try (Workbench bench = Workbench.open(set)) {
             List<Prism> drawn = bench.read(prisms).prisms();

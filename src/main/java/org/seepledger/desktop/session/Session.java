@@ -10,6 +10,7 @@ import javafx.beans.property.SimpleObjectProperty;
 import javafx.beans.property.SimpleStringProperty;
 import javafx.beans.property.StringProperty;
 import org.seepledger.prism.Prism;
+import org.seepledger.report.CellPlace;
 
 /** What the window looks at. Used on the window's own thread alone. */
 public final class Session {
@@ -22,6 +23,7 @@ public final class Session {
     private final StringProperty lit = new SimpleStringProperty("");
     private final StringProperty status = new SimpleStringProperty("");
     private final ObjectProperty<FaceFlows> faceFlows = new SimpleObjectProperty<>(FaceFlows.NONE);
+    private final ObjectProperty<Optional<CellPlace>> target = new SimpleObjectProperty<>(Optional.empty());
     private final ObjectProperty<Demand> demand = new SimpleObjectProperty<>(Demand.NONE);
 
     /** What one pane asks of the map. */
@@ -29,7 +31,9 @@ public final class Session {
         /** Nothing. */
         NONE,
         /** To show where the selected prism does not close. */
-        SHOW_IMBALANCE
+        SHOW_IMBALANCE,
+        /** To begin to draw a prism. */
+        DRAW_PRISM
     }
 
     /**
@@ -90,6 +94,11 @@ public final class Session {
     /** {@return what flows through the selected prism's faces, for arrows on the map} */
     public ObjectProperty<FaceFlows> faceFlows() {
         return faceFlows;
+    }
+
+    /** {@return the place that a pane asks the map to go to; whoever goes there empties it} */
+    public ObjectProperty<Optional<CellPlace>> target() {
+        return target;
     }
 
     /** {@return what a pane asks of the map; whoever meets it sets it back to none} */
