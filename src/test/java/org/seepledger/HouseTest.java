@@ -47,7 +47,12 @@ class HouseTest {
             List.of("unit", "fault", "progress"));
 
     private static final String[] ENGINE = {
-        ROOT + "balance..", ROOT + "plume..", ROOT + "prism..", ROOT + "aquifer..", ROOT + "ledger..",
+        ROOT + "balance..",
+        ROOT + "plume..",
+        ROOT + "sketch..",
+        ROOT + "prism..",
+        ROOT + "aquifer..",
+        ROOT + "ledger..",
     };
 
     @ArchTest
@@ -99,6 +104,15 @@ class HouseTest {
             .because("a library that reads or writes files can then be changed in one place");
 
     @ArchTest
+    static final ArchRule HTML_STAYS_IN_THE_PAGE = noClasses()
+            .that()
+            .resideOutsideOfPackage(ROOT + "report.page..")
+            .should()
+            .dependOnClassesThat()
+            .resideInAPackage("j2html..")
+            .because("what a report says must be there for the window too, and text is escaped in one place");
+
+    @ArchTest
     static final ArchRule UNIT_LIBRARY_STAYS_IN_UNIT = noClasses()
             .that()
             .resideOutsideOfPackages(ROOT + "unit..", ROOT + "io.crs..")
@@ -123,6 +137,15 @@ class HouseTest {
             .should()
             .dependOnClassesThat(describe("files", HouseTest::isAboutFiles))
             .because("the engine asks suppliers for one interval and band at a time, wherever they have it from");
+
+    @ArchTest
+    static final ArchRule BUDGETS_KNOW_NO_DRAWINGS = noClasses()
+            .that()
+            .resideInAnyPackage(ROOT + "balance..", ROOT + "plume..")
+            .should()
+            .dependOnClassesThat()
+            .resideInAPackage(ROOT + "sketch..")
+            .because("a budget is struck for prisms, however they came to be");
 
     @ArchTest
     static final ArchRule ENGINE_KNOWS_NO_WINDOWS = noClasses()

@@ -8,7 +8,6 @@ import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
-import java.util.Optional;
 import java.util.Set;
 import java.util.stream.IntStream;
 import org.seepledger.balance.Balance;
@@ -106,7 +105,7 @@ final class ReportFile {
                 subject.notes(),
                 options,
                 pictures,
-                Optional.empty());
+                drawing.exchange(results.get(0).record().period()));
         Path file = out.file(NAME);
         Files.writeString(file, ReportPage.of(report));
     }

@@ -58,8 +58,16 @@ public final class BudgetSeries {
         this.bottom = top + plotHeight(height);
         this.stripTop = bottom + 50;
         this.end = values.closes() ? stripTop - 4 : stripTop + STRIP;
-        double greatest = IntStream.range(0, values.count()).mapToDouble(values::up).filter(Double::isFinite).max().orElse(0);
-        double least = IntStream.range(0, values.count()).mapToDouble(values::down).filter(Double::isFinite).max().orElse(0);
+        double greatest = IntStream.range(0, values.count())
+                .mapToDouble(values::up)
+                .filter(Double::isFinite)
+                .max()
+                .orElse(0);
+        double least = IntStream.range(0, values.count())
+                .mapToDouble(values::down)
+                .filter(Double::isFinite)
+                .max()
+                .orElse(0);
         this.axis = new ValueAxis(-least, greatest, top, bottom - top);
         double[] residuals = values.closes() ? new double[0] : finite(values.residual());
         this.strip = new ValueAxis(
@@ -68,8 +76,7 @@ public final class BudgetSeries {
                 stripTop,
                 STRIP);
         this.left = 12 + Math.max(axis.labelWidth(false), values.closes() ? 0 : strip.labelWidth(true));
-        this.time = new TimeAxis(
-                budgets.stream().map(PeriodBudget::period).toList(), times, left, width - RIGHT);
+        this.time = new TimeAxis(budgets.stream().map(PeriodBudget::period).toList(), times, left, width - RIGHT);
         this.picture = new Picture(
                 width,
                 end + 26,
@@ -92,7 +99,7 @@ public final class BudgetSeries {
      * @param times the record's instants, for dates
      * @param unit the unit to show
      * @param marked the period to mark, if any
-     * @param width in logical pixels, at least 300
+     * @param width in logical pixels, at least 340
      */
     public static BudgetSeries of(
             String prism, List<PeriodBudget> budgets, Times times, UnitShown unit, OptionalInt marked, double width) {
@@ -170,7 +177,7 @@ public final class BudgetSeries {
     }
 
     private String aboutResidual() {
-        String name = values.storageKnown() ? "residual" : "not explained, storage included";
+        String name = values.storageKnown() ? "residual" : "gains − losses";
         return values.closes()
                 ? name + ": rounding alone, at most " + Figures.typeset(values.largestResidual()) + " " + unit.words()
                 : name + ", on a scale of its own";
@@ -227,11 +234,12 @@ public final class BudgetSeries {
     private String description() {
         String span = budgets.size() == 1
                 ? "In " + budgets.get(0).period().name() + ", in " + unit.words()
-                : "In " + budgets.size() + " periods from " + budgets.get(0).period().name() + " to "
+                : "In " + budgets.size() + " periods from "
+                        + budgets.get(0).period().name() + " to "
                         + budgets.get(budgets.size() - 1).period().name() + ", in " + unit.words();
         return span + ": gains " + range(values.gains()) + ", losses " + range(values.losses()) + ", change in storage "
                 + range(values.storage()) + ", "
-                + (values.storageKnown() ? "residual " : "not explained, storage included, ")
+                + (values.storageKnown() ? "residual " : "gains − losses ")
                 + range(values.residual()) + ".";
     }
 

@@ -38,7 +38,7 @@ final class DominanceWords {
         }
         List<String> largest = terms.stream()
                 .limit(NAMED)
-                .map(term -> term.name() + " " + wording.rate(volume.applyAsDouble(term), time) + " ("
+                .map(term -> term.name() + " (" + wording.rate(volume.applyAsDouble(term), time) + ", "
                         + wording.percent(100 * volume.applyAsDouble(term) / all) + ")")
                 .toList();
         sentences.add("Of all " + what + ", " + wording.rate(all, time) + " gross, the largest "

@@ -34,11 +34,11 @@ final class ExchangeWords {
         double taken = volume(partner, result.prism());
         double time = result.record().period().duration();
         if (Double.isNaN(given + taken)) {
-            return "What passes to and from \"" + partner + "\" cannot be told apart: the two overlap.";
+            return "What passes to and from " + wording.quoted(partner) + " cannot be told apart: the two overlap.";
         }
         return given == 0 && taken == 0
                 ? null
-                : "To \"" + partner + "\" it gives " + wording.rate(given, time) + ", and takes "
+                : "To " + wording.quoted(partner) + " it gives " + wording.rate(given, time) + ", and takes "
                         + wording.rate(taken, time) + " from it.";
     }
 

@@ -14,13 +14,15 @@ public final class Wording {
     private final ResultUnits units;
     private final DoubleFunction<String> number;
     private final DoubleFunction<String> percent;
-    private final boolean raised;
+    private final boolean typeset;
+    private final String space;
 
-    private Wording(ResultUnits units, DoubleFunction<String> number, DoubleFunction<String> percent, boolean raised) {
+    private Wording(ResultUnits units, DoubleFunction<String> number, DoubleFunction<String> percent, boolean typeset) {
         this.units = units;
         this.number = number;
         this.percent = percent;
-        this.raised = raised;
+        this.typeset = typeset;
+        this.space = typeset ? "\u00a0" : " ";
     }
 
     /**
@@ -48,7 +50,7 @@ public final class Wording {
      * @param duration the time that it took, in time units
      */
     public String rate(double volume, double duration) {
-        return number.apply(volume / duration * units.rateFactor()) + " " + unit(units.rate());
+        return number.apply(volume / duration * units.rateFactor()) + space + unit(units.rate());
     }
 
     /**
@@ -57,7 +59,7 @@ public final class Wording {
      * @param volume length³
      */
     public String volume(double volume) {
-        return number.apply(volume * units.volumeFactor()) + " " + unit(units.volume());
+        return number.apply(volume * units.volumeFactor()) + space + unit(units.volume());
     }
 
     /**
@@ -84,7 +86,7 @@ public final class Wording {
      * @param unit the unit
      */
     public String unit(Measure unit) {
-        return raised ? typeset(unit) : unit.toString();
+        return typeset ? raised(unit) : unit.toString();
     }
 
     /**
@@ -92,8 +94,17 @@ public final class Wording {
      *
      * @param unit the unit
      */
-    public static String typeset(Measure unit) {
+    public static String raised(Measure unit) {
         return unit.toString().replaceAll("(?<=[A-Za-z])2\\b", "²").replaceAll("(?<=[A-Za-z])3\\b", "³");
+    }
+
+    /**
+     * {@return a name in quotation marks}
+     *
+     * @param name the name
+     */
+    public String quoted(String name) {
+        return typeset ? "\u201c" + name + "\u201d" : "\"" + name + "\"";
     }
 
     /**

@@ -37,7 +37,7 @@ public record BudgetShown(Prism prism, double area, PeriodBudget budget, List<St
      */
     public String whose(OpenSet set) {
         Period period = budget.period();
-        String unit = Wording.typeset(Measure.power(set.aquifer().lengthUnit(), 2));
+        String unit = Wording.raised(Measure.power(set.aquifer().lengthUnit(), 2));
         return Words.of(
                 "budget.belongs",
                 prism.name(),

@@ -70,7 +70,7 @@ final class LedgerChoices extends VBox {
 
     /** The unit with its powers raised. */
     private static String unit(String unit) {
-        return Wording.typeset(Measure.of(unit));
+        return Wording.raised(Measure.of(unit));
     }
 
     private static String amounts(boolean volumes) {

@@ -1,16 +1,22 @@
 package org.seepledger.io.prisms;
 
+import com.fasterxml.jackson.databind.JsonNode;
 import java.util.HashSet;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Set;
 import java.util.function.Consumer;
 import org.seepledger.io.NearestName;
 
-/** Tells, once for each, of properties that look like the program's own but are not read. */
+/** Tells the program's own properties from others', and, once for each, of properties that look like the program's own but are not read. */
 final class OwnKeys {
 
     private static final List<String> KEYS = List.of("name", "layers", "top", "bottom", "boundaries");
+    /** What a person wrote about a prism; for people alone, so any kind of value will do. */
+    private static final String NOTE = "note";
+
     private static final int WORD = 5;
 
     private final Consumer<String> notes;
@@ -18,6 +24,23 @@ final class OwnKeys {
 
     OwnKeys(Consumer<String> notes) {
         this.notes = notes;
+    }
+
+    /** {@return what the property {@code note} says, or nothing} */
+    static String note(JsonNode properties) {
+        JsonNode note = properties.path(NOTE);
+        return note.isContainerNode() ? note.toString() : note.isNull() ? "" : note.asText();
+    }
+
+    /** {@return the properties of other programs, as JSON texts by name, in the file's order} */
+    static Map<String, String> others(JsonNode properties) {
+        Map<String, String> others = new LinkedHashMap<>();
+        properties.properties().stream()
+                .filter(property ->
+                        !KEYS.contains(property.getKey()) && !property.getKey().equals(NOTE))
+                .forEach(property ->
+                        others.put(property.getKey(), property.getValue().toString()));
+        return others;
     }
 
     void look(Iterable<String> properties, Spot spot) {

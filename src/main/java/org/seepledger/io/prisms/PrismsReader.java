@@ -1,6 +1,5 @@
 package org.seepledger.io.prisms;
 
-import com.fasterxml.jackson.databind.JsonNode;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
@@ -12,13 +11,16 @@ import org.locationtech.jts.geom.Coordinate;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.fault.DataFault;
 import org.seepledger.io.DataFolder;
-import org.seepledger.io.JsonFile;
 import org.seepledger.io.crs.PlanCrs;
 import org.seepledger.prism.GridEdge;
 import org.seepledger.prism.Prism;
 import org.seepledger.prism.Ring;
 import org.seepledger.prism.Side;
 import org.seepledger.prism.SideNumbering;
+import org.seepledger.sketch.Drawing;
+import org.seepledger.sketch.Place;
+import org.seepledger.sketch.PolygonCheck;
+import org.seepledger.sketch.Shape;
 
 /**
  * Reads prisms from a GeoJSON file.
@@ -41,11 +43,33 @@ public record PrismsReader(
      * @throws DataFault if anything in it is wrong, with the feature and key or coordinates
      */
     public List<Prism> read(Path file, String shownFile) {
-        GridEdge edge = GridEdge.of(grid);
+        DataFolder folder = DataFolder.holding(file, shownFile);
         List<Prism> prisms = new ArrayList<>();
-        for (Prism prism : asDrawn(file, shownFile)) {
-            String place = "feature " + (prisms.size() + 1) + " " + Spot.quoted(prism.name());
-            prisms.add(within(edge, prism, new Spot(shownFile, place)));
+        new ShapesReader(crs, layers, notes, PrismsReader::refuse)
+                .read(file, shownFile, (shape, spot) -> prisms.add(onGrid(shape, folder, spot)));
+        if (prisms.isEmpty()) {
+            throw new Spot(shownFile, "").fault("no features", "at least one polygon", "Draw a prism.");
+        }
+        return prisms;
+    }
+
+    /**
+     * {@return the prisms of a drawing, the same as if it were written to a file and read}
+     *
+     * @param drawing the drawing
+     * @param file the file that it is or would be kept in; surfaces are looked for beside it
+     * @param shownFile the file as the user named it, for messages
+     * @throws DataFault if a shape is no polygon, reaches beyond the grid, or names a surface that cannot be read
+     * @throws org.seepledger.sketch.Refusal if a shape names a layer that the grid has not
+     */
+    public List<Prism> of(Drawing drawing, Path file, String shownFile) {
+        DataFolder folder = DataFolder.holding(file, shownFile);
+        List<Prism> prisms = new ArrayList<>();
+        for (Shape shape : drawing.shapes()) {
+            Spot spot = new Spot(shownFile, Spot.quoted(shape.name()));
+            RingNames ringNames = new RingNames(new SideNumbering(shape.byPart()));
+            shape.flaw().ifPresent(flaw -> refuse(ringNames.fault(flaw, "", spot)));
+            prisms.add(onGrid(shape, folder, spot));
         }
         return prisms;
     }
@@ -58,19 +82,10 @@ public record PrismsReader(
      * @throws DataFault if anything else in it is wrong, with the feature and key or coordinates
      */
     public List<Prism> asDrawn(Path file, String shownFile) {
-        JsonNode root = JsonFile.read(file, shownFile);
-        Spot whole = new Spot(shownFile, "");
-        List<JsonNode> features = features(root, whole);
-        FileCrs fileCrs = new FileCrs(crs, notes);
         DataFolder folder = DataFolder.holding(file, shownFile);
-        FeatureReader reader = new FeatureReader(
-                new RingsReader(fileCrs.transform(root, whole), fileCrs.remedyForDegrees()),
-                new VerticalRangeReader(layers, folder, surfaces),
-                new OwnKeys(notes));
         List<Prism> prisms = new ArrayList<>();
-        for (JsonNode feature : features) {
-            prisms.add(reader.read(feature, prisms.size() + 1, shownFile));
-        }
+        new ShapesReader(crs, layers, notes, PrismsReader::refuse)
+                .read(file, shownFile, (shape, spot) -> prisms.add(prism(shape, folder, spot)));
         return prisms;
     }
 
@@ -83,8 +98,8 @@ public record PrismsReader(
     public Prism admitted(Prism drawn) {
         Spot spot = new Spot(Spot.quoted(drawn.name()), "");
         RingNames names = new RingNames(new SideNumbering(drawn.parts().size() > 1));
-        new PolygonCheck(names, spot, "")
-                .check(drawn.parts().stream().map(PrismsReader::closed).toList());
+        PolygonCheck.first(drawn.parts().stream().map(PrismsReader::closed).toList())
+                .ifPresent(flaw -> refuse(names.fault(flaw, "", spot)));
         return within(GridEdge.of(grid), drawn, spot);
     }
 
@@ -102,30 +117,19 @@ public record PrismsReader(
         return rings;
     }
 
-    private static List<JsonNode> features(JsonNode root, Spot spot) {
-        String type = root.path("type").asText();
-        if (type.equals("Feature")) {
-            return List.of(root);
-        }
-        JsonNode features = root.path("features");
-        if (!type.equals("FeatureCollection") || !features.isArray()) {
-            throw spot.fault(
-                    root.isObject() ? "a GeoJSON object of type " + Spot.shown(root.path("type")) : Spot.shown(root),
-                    "a FeatureCollection of Polygons or MultiPolygons",
-                    "Wrap the polygons in features, each with a property \"name\".");
-        }
-        if (features.isEmpty()) {
-            throw spot.fault("no features", "at least one polygon", "Draw a prism.");
-        }
-        List<JsonNode> all = new ArrayList<>();
-        for (JsonNode feature : features) {
-            all.add(feature);
-            if (feature.has("crs")) {
-                throw spot.in("feature " + all.size())
-                        .fault("a crs of its own", "one crs for the whole file", "Move it to the top of the file.");
-            }
-        }
-        return all;
+    private static void refuse(DataFault flaw) {
+        throw flaw;
+    }
+
+    private Prism onGrid(Shape shape, DataFolder folder, Spot spot) {
+        return within(GridEdge.of(grid), prism(shape, folder, spot), spot);
+    }
+
+    private Prism prism(Shape shape, DataFolder folder, Spot spot) {
+        return shape.prism(layers, (surface, lid) -> {
+            String path = surface.path();
+            return surfaces.read(folder.resolve(path, spot.in(lid).place()), path);
+        });
     }
 
     private Prism within(GridEdge edge, Prism prism, Spot spot) {
@@ -176,8 +180,8 @@ public record PrismsReader(
     private String extent() {
         double width = grid.x().edge(grid.columns());
         double height = grid.y().edge(grid.rows());
-        return "corners at " + Spot.point(grid.mapX(0, 0), grid.mapY(0, 0)) + " and "
-                + Spot.point(grid.mapX(width, height), grid.mapY(width, height))
+        return "corners at " + Place.shown(grid.mapX(0, 0), grid.mapY(0, 0)) + " and "
+                + Place.shown(grid.mapX(width, height), grid.mapY(width, height))
                 + (grid.rotation() == 0 ? "" : " opposite each other, turned by " + grid.rotation() + " degrees");
     }
 }

@@ -27,7 +27,10 @@ final class BudgetRows {
         this.budget = budget;
     }
 
-    /** An item: a row of its own in its only layer, or a sum and a row for each layer. */
+    /**
+     * An item: a row of its own in its only layer, or a sum and a row for each layer. Where nothing flows in any layer, the
+     * sum alone says so.
+     */
     List<TrTag> of(Term term) {
         List<TrTag> rows = new ArrayList<>();
         if (term.entries().size() == 1) {
@@ -38,8 +41,12 @@ final class BudgetRows {
                             .with(text(term.item() + " "), span(layer(only)).withClass("layer"))));
             return rows;
         }
-        rows.add(amounts(Cells.row(term.item()), term.inflow(), term.outflow()).withClass("item"));
-        for (Entry entry : term.entries()) {
+        rows.add(amounts(Cells.row(term.item()), term.inflow(), term.outflow())
+                .withClass("item")
+                .withData("group", term.group().toString())
+                .withData("item", term.item()));
+        boolean idle = term.inflow() == 0 && term.outflow() == 0;
+        for (Entry entry : idle ? List.<Entry>of() : term.entries()) {
             rows.add(of(entry, Cells.row(layer(entry))).withClass("layer"));
         }
         return rows;
@@ -71,7 +78,7 @@ final class BudgetRows {
     private TrTag amounts(ThTag name, double inflow, double outflow) {
         double throughput = budget.totals().throughput();
         double share = throughput == 0 ? Double.NaN : 100 * (inflow - outflow) / throughput;
-        return tr(name, amount(inflow), amount(outflow), amount(inflow - outflow), Cells.percent(share));
+        return tr(name, amount(inflow), amount(outflow), amount(inflow - outflow), Cells.share(share));
     }
 
     private DomContent amount(double volume) {
@@ -92,6 +99,6 @@ final class BudgetRows {
 
     private DomContent share(Total total, double value) {
         double throughput = budget.totals().throughput();
-        return total.isPercentage() ? td() : Cells.percent(throughput == 0 ? Double.NaN : 100 * value / throughput);
+        return total.isPercentage() ? td() : Cells.share(throughput == 0 ? Double.NaN : 100 * value / throughput);
     }
 }

@@ -30,6 +30,12 @@ final class Cells {
         return number(value, Figures::typesetPercent);
     }
 
+    /** A share in percent, of which less than a hundredth is only said to be that. */
+    static TdTag share(double value) {
+        boolean little = value != 0 && Math.abs(value) < 0.005;
+        return number(value, share -> little ? "<0.01\u202f%" : Figures.typesetPercent(share));
+    }
+
     /** A whole number that names something, as a row. */
     static TdTag ordinal(int value) {
         return td(String.valueOf(value)).withClass("num");

@@ -3,22 +3,28 @@ package org.seepledger.report.page;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalInt;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.GriddedValues;
 import org.seepledger.aquifer.PlacedWell;
+import org.seepledger.aquifer.StorageKnowledge;
 import org.seepledger.aquifer.Window;
 import org.seepledger.balance.Balance;
 import org.seepledger.balance.HotSpot;
 import org.seepledger.balance.Imbalance;
 import org.seepledger.io.result.ResultUnits;
+import org.seepledger.ledger.Period;
 import org.seepledger.picture.BudgetBlocks;
+import org.seepledger.picture.BudgetSeries;
 import org.seepledger.picture.Drape;
+import org.seepledger.picture.ExchangeDiagram;
 import org.seepledger.picture.MapPicture;
 import org.seepledger.picture.MapPicture.Ground;
 import org.seepledger.picture.Picture;
 import org.seepledger.picture.SectionLine;
 import org.seepledger.picture.SectionPicture;
+import org.seepledger.picture.StorageCurve;
 import org.seepledger.picture.UnitShown;
 import org.seepledger.picture.ValueScale;
 import org.seepledger.prism.Prism;
@@ -40,6 +46,7 @@ public final class ReportPictures {
     private final List<PlacedWell> wells;
     private final Balance balance;
     private final UnitShown rate;
+    private final UnitShown volume;
     private final String length;
 
     /**
@@ -57,6 +64,7 @@ public final class ReportPictures {
         this.wells = aquifer.placedWells();
         this.balance = balance;
         this.rate = new UnitShown(wording.unit(units.rate()), units.rateFactor(), true);
+        this.volume = new UnitShown(wording.unit(units.volume()), units.volumeFactor(), false);
         this.length = wording.unit(aquifer.lengthUnit());
     }
 
@@ -74,9 +82,36 @@ public final class ReportPictures {
                 Optional.of(map(prism, section.map(drawn -> line), result)),
                 section,
                 Optional.of(BudgetBlocks.of(prism.name(), result.record(), BudgetBlocks.Flows.GROSS, rate, WIDTH)),
-                Optional.empty(),
-                Optional.empty(),
+                isTransient(result) ? Optional.of(series(prism, result)) : Optional.empty(),
+                isTransient(result) && result.storage() == StorageKnowledge.KNOWN
+                        ? Optional.of(stored(prism, result))
+                        : Optional.empty(),
                 result.isWorthLocating() ? Optional.of(imbalance(prism, result)) : Optional.empty());
+    }
+
+    /**
+     * {@return what prisms give to each other over the record; none where there is but one}
+     *
+     * @param record the record
+     */
+    public Optional<Picture> exchange(Period record) {
+        List<String> names = prisms.stream().map(Prism::name).toList();
+        return names.size() < 2
+                ? Optional.empty()
+                : Optional.of(ExchangeDiagram.of(names, balance.exchange(), record, rate, WIDTH));
+    }
+
+    private static boolean isTransient(PrismResult result) {
+        return result.periods().size() > 1;
+    }
+
+    private Picture series(Prism prism, PrismResult result) {
+        return BudgetSeries.of(prism.name(), result.periods(), aquifer.times(), rate, OptionalInt.empty(), WIDTH)
+                .picture();
+    }
+
+    private Picture stored(Prism prism, PrismResult result) {
+        return StorageCurve.of(prism.name(), result.periods(), aquifer.times(), volume, WIDTH);
     }
 
     private Picture map(Prism prism, Optional<SectionLine> line, PrismResult result) {
