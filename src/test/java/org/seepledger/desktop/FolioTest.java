@@ -21,10 +21,12 @@ import org.junit.jupiter.api.io.TempDir;
 import org.seepledger.balance.Periods;
 import org.seepledger.balance.WellRule;
 import org.seepledger.desktop.ledger.LedgerRow;
+import org.seepledger.desktop.map.Camera;
 import org.seepledger.desktop.session.Drawing;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.job.BalanceJob;
 import org.seepledger.job.BalanceRequest;
+import org.seepledger.job.MapQuantity;
 import org.seepledger.job.ReportRequest;
 import org.seepledger.prism.Prism;
 import org.seepledger.prism.Ring;
@@ -143,12 +145,14 @@ class FolioTest {
     @Test
     void whatDoesNotCloseLeadsToTheMap() {
         openSet(Path.of("sample-aquifers/terrace"));
-        List<Session.Demand> asked = new ArrayList<>();
-        window.robot.interact(() -> session().demand().addListener((demand, before, after) -> asked.add(after)));
         window.robot.clickOn("#folio-answers");
         window.await(() -> isShown("#closure-cell-1"));
+        Camera before = window.assembly().map().camera().get();
         window.robot.clickOn("#closure-cell-1");
-        assertThat(asked).contains(Session.Demand.SHOW_IMBALANCE);
+        Camera after = window.assembly().map().camera().get();
+        assertThat(after.scale()).isGreaterThan(before.scale());
+        assertThat(window.assembly().map().values().quantity().get())
+                .hasValueSatisfying(shown -> assertThat(shown.kind()).isEqualTo(MapQuantity.Kind.IMBALANCE));
     }
 
     @Test
