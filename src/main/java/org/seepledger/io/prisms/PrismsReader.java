@@ -7,15 +7,19 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Set;
 import java.util.function.Consumer;
+import org.locationtech.jts.geom.Coordinate;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.fault.DataFault;
 import org.seepledger.io.DataFolder;
 import org.seepledger.io.crs.PlanCrs;
 import org.seepledger.prism.GridEdge;
 import org.seepledger.prism.Prism;
+import org.seepledger.prism.Ring;
+import org.seepledger.prism.Side;
 import org.seepledger.prism.SideNumbering;
 import org.seepledger.sketch.Drawing;
 import org.seepledger.sketch.Place;
+import org.seepledger.sketch.PolygonCheck;
 import org.seepledger.sketch.Shape;
 
 /**
@@ -77,16 +81,62 @@ public record PrismsReader(
         return prisms;
     }
 
+    /**
+     * {@return the prisms of a file as they stand there, even where they reach beyond the grid}
+     *
+     * @param file a FeatureCollection of Polygons and MultiPolygons, or one Feature
+     * @param shownFile the file as the user named it, for messages
+     * @throws DataFault if anything else in it is wrong, with the feature and key or coordinates
+     */
+    public List<Prism> asDrawn(Path file, String shownFile) {
+        DataFolder folder = DataFolder.holding(file, shownFile);
+        List<Prism> prisms = new ArrayList<>();
+        new ShapesReader(crs, layers, warnings, notes, PrismsReader::refuse)
+                .read(file, shownFile, (shape, spot) -> prisms.add(prism(shape, folder, spot)));
+        return prisms;
+    }
+
+    /**
+     * {@return a prism that was drawn rather than read, as it would be read from a file}
+     *
+     * @param drawn the prism, in map coordinates
+     * @throws DataFault if it is no polygon, or does not lie on the grid
+     */
+    public Prism admitted(Prism drawn) {
+        Spot spot = new Spot(Spot.quoted(drawn.name()), "");
+        RingNames names = new RingNames(new SideNumbering(drawn.parts().size() > 1));
+        PolygonCheck.first(drawn.parts().stream().map(PrismsReader::closed).toList())
+                .ifPresent(flaw -> refuse(names.fault(flaw, "", spot)));
+        return within(GridEdge.of(grid), drawn, spot);
+    }
+
+    private static List<Coordinate[]> closed(List<Ring> part) {
+        List<Coordinate[]> rings = new ArrayList<>();
+        for (Ring ring : part) {
+            int count = ring.sides().size();
+            Coordinate[] vertices = new Coordinate[count + 1];
+            for (int i = 0; i <= count; i++) {
+                Side side = ring.sides().get(i % count);
+                vertices[i] = new Coordinate(side.x(), side.y());
+            }
+            rings.add(vertices);
+        }
+        return rings;
+    }
+
     private static void refuse(DataFault flaw) {
         throw flaw;
     }
 
     private Prism onGrid(Shape shape, DataFolder folder, Spot spot) {
-        Prism prism = shape.prism(layers, (surface, lid) -> {
+        return within(GridEdge.of(grid), prism(shape, folder, spot), spot);
+    }
+
+    private Prism prism(Shape shape, DataFolder folder, Spot spot) {
+        return shape.prism(layers, (surface, lid) -> {
             String path = surface.path();
             return surfaces.read(folder.resolve(path, spot.in(lid).place()), path);
         });
-        return within(GridEdge.of(grid), prism, spot);
     }
 
     private Prism within(GridEdge edge, Prism prism, Spot spot) {
