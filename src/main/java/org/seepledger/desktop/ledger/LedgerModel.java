@@ -169,7 +169,10 @@ public final class LedgerModel {
         Optional<Prism> prism = session.selectedPrism();
         if (set.isPresent() && prism.isPresent()) {
             Period period = reading.period(set.get(), session.interval().get());
-            live.known().get().budget(prism.get(), period).ifPresentOrElse(shown -> show(set.get(), shown), this::clear);
+            live.known()
+                    .get()
+                    .budget(prism.get(), period)
+                    .ifPresentOrElse(shown -> show(set.get(), shown), this::clear);
         } else {
             clear();
         }
@@ -178,8 +181,8 @@ public final class LedgerModel {
 
     private void show(OpenSet set, BudgetShown shown) {
         List<String> layers = set.aquifer().layers().stream().map(Layer::name).toList();
-        rows.setAll(new LedgerRows(shown.budget(), layers, reading.shown(set), order.get())
-                .arranged(arrangement.get()));
+        rows.setAll(
+                new LedgerRows(shown.budget(), layers, reading.shown(set), order.get()).arranged(arrangement.get()));
         unit.set(reading.unitName(set));
         belongs.set(shown.whose(set));
         notes.set(String.join(" ", shown.notes()));
