@@ -44,7 +44,7 @@ public final class ChartModel {
         this.live = live;
         this.reading = reading;
         session.set().addListener((set, before, after) -> change());
-        live.known().addListener((known, before, after) -> change());
+        live.whole().addListener((whole, before, after) -> change());
         session.selected().addListener((selected, before, after) -> change());
         session.interval().addListener((interval, before, after) -> change());
         reading.changes().addListener((changed, before, after) -> change());
@@ -127,7 +127,7 @@ public final class ChartModel {
     }
 
     private Optional<Ledger> ledger() {
-        return live.known().get().record().map(RecordBudget::balance).flatMap(balance -> balance.ledgers().stream()
+        return live.whole().get().map(RecordBudget::balance).flatMap(balance -> balance.ledgers().stream()
                 .filter(ledger -> ledger.prism().equals(session.selected().get()))
                 .findFirst());
     }
