@@ -101,6 +101,7 @@ final class Assembly {
         session.show(Optional.of(opening.set()));
         session.status().set(opened(opening.set().aquifer()));
         files.begin(opening);
+        mapView.focus();
         before.ifPresent(this::putAway);
     }
 

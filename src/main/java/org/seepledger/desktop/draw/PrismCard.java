@@ -33,7 +33,7 @@ final class PrismCard extends VBox {
         this.card = new CardModel(model);
         setId("card");
         getStyleClass().add("sl-float");
-        setMaxWidth(USE_PREF_SIZE);
+        setMaxSize(USE_PREF_SIZE, USE_PREF_SIZE);
         GridPane rows = new GridPane(8, 6);
         ColumnConstraints words = new ColumnConstraints();
         words.setHalignment(HPos.RIGHT);

@@ -10,7 +10,7 @@ import javafx.scene.layout.VBox;
 import org.seepledger.desktop.words.Words;
 
 /** What one draws with: tools, a field for typed values, and the card of the selected prism. */
-public final class Tray extends VBox {
+public final class Tray extends HBox {
 
     private final DraftModel model;
     private final DraftHand hand;
@@ -32,24 +32,24 @@ public final class Tray extends VBox {
         setAlignment(Pos.TOP_RIGHT);
         setMaxSize(USE_PREF_SIZE, USE_PREF_SIZE);
         setPickOnBounds(false);
+        setFillHeight(false);
         card.setVisible(false);
         card.managedProperty().bind(card.visibleProperty());
-        getChildren().addAll(tools(), card);
+        getChildren().addAll(card, tools());
         visibleProperty()
                 .bind(model.session().set().map(java.util.Optional::isPresent));
     }
 
-    private HBox tools() {
-        HBox row = new HBox(2);
+    private VBox tools() {
+        VBox row = new VBox(1);
         row.getStyleClass().addAll("sl-float", "sl-tools");
-        row.setAlignment(Pos.CENTER_LEFT);
-        row.setMaxWidth(USE_PREF_SIZE);
+        row.setMaxSize(USE_PREF_SIZE, USE_PREF_SIZE);
         for (Tool tool : Tool.values()) {
             row.getChildren().add(button(tool));
         }
         typed.setId("typed");
         typed.getStyleClass().add("small");
-        typed.setPrefColumnCount(9);
+        typed.setPrefColumnCount(8);
         typed.setOnAction(entered -> {
             if (hand.type(typed.getText())) {
                 typed.clear();
@@ -61,6 +61,7 @@ public final class Tray extends VBox {
         prism.setId("card-open");
         prism.getStyleClass().addAll("flat", "small");
         prism.setTooltip(new Tooltip(Words.of("action.card")));
+        prism.setMaxWidth(Double.MAX_VALUE);
         prism.setOnAction(pressed -> flipCard());
         row.getChildren().addAll(typed, prism);
         return row;
@@ -75,7 +76,7 @@ public final class Tray extends VBox {
         button.setId(tool.key().replace('.', '-'));
         button.getStyleClass().setAll("sl-tool");
         button.setTooltip(new Tooltip(tool.hint() + " (" + tool.keys() + ")"));
-        button.setFocusTraversable(true);
+        button.setMaxWidth(Double.MAX_VALUE);
         button.setOnAction(pressed -> {
             model.choose(tool);
             button.setSelected(model.tool().get() == tool);

@@ -68,6 +68,11 @@ public final class MapView extends BorderPane {
         canvas.addEventHandler(ScrollEvent.SCROLL, this::onScroll);
     }
 
+    /** Moves the keyboard to the map. */
+    public void focus() {
+        canvas.requestFocus();
+    }
+
     /** Paints anew what the hand draws. */
     public void repaint() {
         canvas.repaint();
