@@ -11,7 +11,9 @@ import org.seepledger.ledger.Period;
 import org.seepledger.ledger.PeriodBudget;
 import org.seepledger.prism.Prism;
 import org.seepledger.prism.VerticalRange;
+import org.seepledger.report.Wording;
 import org.seepledger.unit.Figures;
+import org.seepledger.unit.Measure;
 
 /**
  * A budget with the geometry that it belongs to.
@@ -35,12 +37,12 @@ public record BudgetShown(Prism prism, double area, PeriodBudget budget, List<St
      */
     public String whose(OpenSet set) {
         Period period = budget.period();
-        String unit = set.aquifer().lengthUnit() + "2";
+        String unit = Wording.raised(Measure.power(set.aquifer().lengthUnit(), 2));
         return Words.of(
                 "budget.belongs",
                 prism.name(),
                 reach(set),
-                Figures.typeset(area),
+                Figures.tabular(area),
                 unit,
                 PeriodWords.of(period, set.aquifer().times()));
     }
@@ -71,7 +73,14 @@ public record BudgetShown(Prism prism, double area, PeriodBudget budget, List<St
                 known.prisms().get(prism),
                 known.balance().cuts().get(prism).area(),
                 known.balance().ledgers().get(prism).budget(period),
-                known.notes());
+                ownNotes(known, known.prisms().get(prism).name()));
+    }
+
+    /** Notes on one prism begin with its name. */
+    private static List<String> ownNotes(RecordBudget known, String prism) {
+        return known.notes().stream()
+                .filter(note -> note.startsWith("\"" + prism + "\""))
+                .toList();
     }
 
     static BudgetShown of(IntervalBudget known) {

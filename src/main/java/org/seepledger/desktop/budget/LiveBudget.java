@@ -64,6 +64,11 @@ public final class LiveBudget {
         return known.getReadOnlyProperty();
     }
 
+    /** Asks the map to begin a prism: what leads on where there is none. */
+    public void draw() {
+        session.demand().set(Session.Demand.DRAW_PRISM);
+    }
+
     /** {@return how it stands with the budget of the interval looked at} */
     public ReadOnlyObjectProperty<PaneState> now() {
         return now.getReadOnlyProperty();
@@ -72,6 +77,11 @@ public final class LiveBudget {
     /** {@return how it stands with the budgets of the whole record} */
     public ReadOnlyObjectProperty<PaneState> record() {
         return record.getReadOnlyProperty();
+    }
+
+    /** Old content is dimmed meanwhile, and it is said whose it is. */
+    private static String working(boolean shown) {
+        return Words.of(shown ? "budget.working.shown" : "budget.working");
     }
 
     private static PaneState nothing() {
@@ -115,7 +125,7 @@ public final class LiveBudget {
                 || known.get().hasNow(question.prism, question.interval)) {
             now.set(PaneState.READY);
         } else if (asked.isEmpty()) {
-            now.set(PaneState.working(Words.of("budget.working")));
+            now.set(PaneState.working(working(known.get().now().isPresent() || known.get().record().isPresent())));
             ask(question);
         }
     }
@@ -162,7 +172,7 @@ public final class LiveBudget {
         }
         thorough.cancel();
         balanced = Optional.empty();
-        record.set(PaneState.working(Words.of("budget.record.working")));
+        record.set(PaneState.working(working(known.get().record().isPresent())));
         if (drawing.settled()) {
             balance(set, drawing.prisms());
         }

@@ -119,7 +119,11 @@ public final class Reading {
         return units;
     }
 
-    /** {@return the units in use} */
+    /**
+     * {@return the units in use}
+     *
+     * @param set the set
+     */
     public ResultUnits inUse(OpenSet set) {
         return set.workbench().units(measure(rateUnit), measure(volumeUnit));
     }
@@ -129,24 +133,21 @@ public final class Reading {
     }
 
     /**
-     * {@return what a volume of a period is multiplied by to be shown}
+     * {@return the name of the unit shown, as users write it}
      *
      * @param set the set
-     * @param period the period
      */
-    public double factor(OpenSet set, Period period) {
-        ResultUnits units = inUse(set);
-        return volumes.get() ? units.volumeFactor() : units.rateFactor() / period.duration();
-    }
-
-    /** {@return the name of the unit shown} */
-    public String unitShown(OpenSet set) {
+    public String unitName(OpenSet set) {
         ResultUnits units = inUse(set);
         return (volumes.get() ? units.volume() : units.rate()).toString();
     }
 
-    /** {@return the unit shown, for charts} */
-    public UnitShown ofCharts(OpenSet set) {
+    /**
+     * {@return the unit shown, its name as it is to be read; amounts in it are those of the result tables, digit for digit}
+     *
+     * @param set the set
+     */
+    public UnitShown shown(OpenSet set) {
         ResultUnits units = inUse(set);
         Wording words = Wording.typeset(units);
         return volumes.get()

@@ -66,6 +66,11 @@ public final class ChartModel {
         return when.getReadOnlyProperty();
     }
 
+    /** Asks the map to begin a prism. */
+    public void draw() {
+        live.draw();
+    }
+
     /** {@return which state the pane is in} */
     public ReadOnlyObjectProperty<PaneState> state() {
         return live.record();
@@ -105,17 +110,19 @@ public final class ChartModel {
      * {@return the chart, if the record is known}
      *
      * @param width in logical pixels
+     * @param height in logical pixels
      */
-    public Optional<BudgetSeries> chart(double width) {
+    public Optional<BudgetSeries> chart(double width, double height) {
         return session.set().get().flatMap(set -> ledger().map(ledger -> {
             List<Period> periods = periods(set);
             return BudgetSeries.of(
                     ledger.prism(),
                     periods.stream().map(ledger::budget).toList(),
                     set.aquifer().times(),
-                    reading.ofCharts(set),
+                    reading.shown(set),
                     marked(periods),
-                    Math.max(300, width));
+                    Math.max(300, width),
+                    height);
         }));
     }
 

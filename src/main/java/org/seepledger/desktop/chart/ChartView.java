@@ -13,11 +13,14 @@ import javafx.scene.layout.Priority;
 import org.seepledger.desktop.paint.PictureView;
 import org.seepledger.desktop.pane.StatePane;
 import org.seepledger.desktop.theme.Theme;
+import org.seepledger.desktop.words.Words;
 import org.seepledger.picture.BudgetSeries;
 import org.seepledger.picture.Picture;
 
 /** The chart, and above it the slider of the interval looked at; a click or drag on the chart moves it too. */
 public final class ChartView extends BorderPane {
+
+    private static final double LEAST_HEIGHT = 236;
 
     private final ChartModel model;
     private final PictureView picture;
@@ -32,7 +35,7 @@ public final class ChartView extends BorderPane {
      */
     public ChartView(ChartModel model, ObservableValue<Theme> theme) {
         this.model = model;
-        this.picture = new PictureView(this::draw, theme);
+        this.picture = new PictureView((PictureView.ForSize) this::draw, theme);
         setId("chart");
         picture.setId("chart-picture");
         picture.setCursor(Cursor.HAND);
@@ -40,9 +43,11 @@ public final class ChartView extends BorderPane {
         picture.setOnMouseDragged(this::look);
         ScrollPane scroll = new ScrollPane(picture);
         scroll.setFitToWidth(true);
+        scroll.setFitToHeight(true);
         scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
+        setMinHeight(LEAST_HEIGHT);
         setTop(time());
-        setCenter(new StatePane(scroll, model.state()));
+        setCenter(new StatePane(scroll, model.state()).withAction(Words.of("budget.draw"), model::draw));
         model.changes().addListener((changes, before, after) -> picture.redraw());
     }
 
@@ -69,8 +74,8 @@ public final class ChartView extends BorderPane {
         return time;
     }
 
-    private Optional<Picture> draw(double width) {
-        drawn = model.chart(width);
+    private Optional<Picture> draw(double width, double height) {
+        drawn = model.chart(width, height);
         return drawn.map(BudgetSeries::picture);
     }
 

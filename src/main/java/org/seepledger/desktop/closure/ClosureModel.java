@@ -35,6 +35,7 @@ public final class ClosureModel {
     private final Reading reading;
     private final ObservableList<Answer.Point> points = FXCollections.observableArrayList();
     private final ObservableList<String> warnings = FXCollections.observableArrayList();
+    private final ObservableList<String> notes = FXCollections.observableArrayList();
     private final ObservableList<String> leads = FXCollections.observableArrayList();
     private final ObservableList<Spot> spots = FXCollections.observableArrayList();
     private final ReadOnlyStringWrapper belongs = new ReadOnlyStringWrapper("");
@@ -66,6 +67,11 @@ public final class ClosureModel {
         return warnings;
     }
 
+    /** {@return lesser remarks} */
+    public ObservableList<String> notes() {
+        return notes;
+    }
+
     /** {@return why it may fail to close; empty where it closes} */
     public ObservableList<String> leads() {
         return leads;
@@ -79,6 +85,11 @@ public final class ClosureModel {
     /** {@return which geometry and time the sentences belong to} */
     public ReadOnlyStringProperty belongs() {
         return belongs.getReadOnlyProperty();
+    }
+
+    /** Asks the map to begin a prism. */
+    public void draw() {
+        live.draw();
     }
 
     /** {@return which state the pane is in} */
@@ -108,6 +119,7 @@ public final class ClosureModel {
         spots.clear();
         leads.clear();
         warnings.clear();
+        notes.clear();
         belongs.set("");
         Optional<OpenSet> set = session.set().get();
         Optional<RecordBudget> record = live.known().get().record();
@@ -134,6 +146,8 @@ public final class ClosureModel {
         points.setAll(Answer.of(result, origins, Wording.typeset(units)).points());
         warnings.addAll(set.workbench().warnings());
         warnings.addAll(record.warnings());
+        notes.addAll(set.workbench().notes());
+        notes.addAll(record.notes());
         if (result.isWorthLocating()) {
             leads.setAll(ClosureLeads.of(set.aquifer(), result));
             result.whereabouts().largest().forEach(cell -> spots.add(spot(set, cell, units)));

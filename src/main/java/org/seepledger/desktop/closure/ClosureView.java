@@ -1,5 +1,6 @@
 package org.seepledger.desktop.closure;
 
+import java.util.List;
 import javafx.collections.ListChangeListener;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
@@ -38,7 +39,7 @@ public final class ClosureView extends BorderPane {
         setTop(belongs);
         ScrollPane scroll = new ScrollPane(sheet);
         scroll.setFitToWidth(true);
-        setCenter(new StatePane(scroll, model.state()));
+        setCenter(new StatePane(scroll, model.state()).withAction(Words.of("budget.draw"), model::draw));
         // The model fills this last, when all else it shows is there.
         model.belongs().addListener((text, before, after) -> fill());
         model.points().addListener((ListChangeListener<Answer.Point>) change -> fill());
@@ -59,9 +60,14 @@ public final class ClosureView extends BorderPane {
                 addPlaces();
             }
         }
-        if (!model.warnings().isEmpty()) {
-            sheet.getChildren().add(words(Words.of("closure.warnings"), "sl-question"));
-            model.warnings().forEach(warning -> sheet.getChildren().add(words(warning, "sl-answer")));
+        addAll(Words.of("closure.warnings"), model.warnings());
+        addAll(Words.of("closure.notes"), model.notes());
+    }
+
+    private void addAll(String title, List<String> sentences) {
+        if (!sentences.isEmpty()) {
+            sheet.getChildren().add(words(title, "sl-question"));
+            sentences.forEach(sentence -> sheet.getChildren().add(words(sentence, "sl-answer")));
         }
     }
 
@@ -96,7 +102,7 @@ public final class ClosureView extends BorderPane {
         Region gap = new Region();
         HBox.setHgrow(gap, Priority.ALWAYS);
         Label imbalance = new Label(spot.imbalance());
-        imbalance.getStyleClass().add("sl-number");
+        imbalance.getStyleClass().add("sl-figure");
         return new HBox(8, way, gap, imbalance);
     }
 

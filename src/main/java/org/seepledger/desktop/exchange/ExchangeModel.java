@@ -21,6 +21,7 @@ import org.seepledger.ledger.ExchangeFlow;
 import org.seepledger.ledger.Period;
 import org.seepledger.picture.ExchangeDiagram;
 import org.seepledger.picture.Picture;
+import org.seepledger.picture.UnitShown;
 import org.seepledger.prism.Prism;
 
 /** What prisms give to each other and to the outside in the period looked at. */
@@ -63,6 +64,11 @@ public final class ExchangeModel {
         return belongs.getReadOnlyProperty();
     }
 
+    /** Asks the map to begin a prism. */
+    public void draw() {
+        live.draw();
+    }
+
     /** {@return which state the pane is in} */
     public ReadOnlyObjectProperty<PaneState> state() {
         return live.record();
@@ -82,7 +88,7 @@ public final class ExchangeModel {
         return session.set().get().flatMap(set -> live.known().get().record().map(record -> {
             Period period = reading.period(set, session.interval().get());
             return ExchangeDiagram.of(
-                    names(record), record.balance().exchange(), period, reading.ofCharts(set), Math.max(320, width));
+                    names(record), record.balance().exchange(), period, reading.shown(set), Math.max(320, width));
         }));
     }
 
@@ -115,12 +121,12 @@ public final class ExchangeModel {
 
     private Matrix matrix(OpenSet set, RecordBudget record) {
         Period period = reading.period(set, session.interval().get());
-        double factor = reading.factor(set, period);
+        UnitShown unit = reading.shown(set);
         List<String> names = new ArrayList<>(names(record));
         names.add(ExchangeFlow.OUTSIDE);
-        Matrix made = Matrix.of(names, reading.ofCharts(set).words(), reading.unitShown(set));
+        Matrix made = Matrix.of(names, unit.words(), reading.unitName(set));
         for (ExchangeFlow flow : record.balance().exchange()) {
-            made.put(names.indexOf(flow.giver()), names.indexOf(flow.receiver()), flow.volume(period) * factor);
+            made.put(names.indexOf(flow.giver()), names.indexOf(flow.receiver()), unit.of(flow.volume(period), period));
         }
         return made;
     }

@@ -8,6 +8,9 @@ import javafx.scene.control.ScrollPane;
 import javafx.scene.control.Tooltip;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.GridPane;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 import org.seepledger.desktop.paint.PictureView;
 import org.seepledger.desktop.pane.StatePane;
@@ -43,14 +46,19 @@ public final class ExchangeView extends BorderPane {
         copy.setId("exchange-copy");
         copy.setTooltip(new Tooltip(Words.of("ledger.copy.tip")));
         copy.setOnAction(pressed -> model.copy());
-        VBox top = new VBox(belongs, copy);
+        Region gap = new Region();
+        HBox.setHgrow(gap, Priority.ALWAYS);
+        HBox top = new HBox(belongs, gap, copy);
         top.getStyleClass().add("sl-choices");
         setTop(top);
-        VBox sheet = new VBox(16, diagram, matrix);
+        ScrollPane across = new ScrollPane(matrix);
+        across.setVbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
+        across.setMinHeight(USE_PREF_SIZE);
+        VBox sheet = new VBox(16, diagram, across);
         sheet.getStyleClass().add("sl-answers");
         ScrollPane scroll = new ScrollPane(sheet);
         scroll.setFitToWidth(true);
-        setCenter(new StatePane(scroll, model.state()));
+        setCenter(new StatePane(scroll, model.state()).withAction(Words.of("budget.draw"), model::draw));
         model.changes().addListener((changes, before, after) -> fill());
         fill();
     }
@@ -68,13 +76,14 @@ public final class ExchangeView extends BorderPane {
             matrix.add(end(styled(flows.names().get(i), "sl-matrix-head")), i + 1, 0);
             matrix.add(styled(flows.names().get(i), "sl-matrix-head"), 0, i + 1);
             for (int receiver = 0; receiver < count; receiver++) {
-                matrix.add(end(styled(flows.text(i, receiver), "sl-number")), receiver + 1, i + 1);
+                matrix.add(end(styled(flows.text(i, receiver), "sl-figure")), receiver + 1, i + 1);
             }
         }
     }
 
     private static Label styled(String text, String style) {
         Label label = new Label(text);
+        label.setMinWidth(USE_PREF_SIZE);
         label.getStyleClass().add(style);
         return label;
     }

@@ -47,7 +47,7 @@ public final class Matrix {
      */
     public String text(int giver, int receiver) {
         Double flow = flows[giver][receiver];
-        return flow == null ? "" : Figures.typeset(flow);
+        return flow == null ? "" : Figures.tabular(flow);
     }
 
     private String exact(int giver, int receiver) {

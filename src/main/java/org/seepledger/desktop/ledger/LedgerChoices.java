@@ -13,6 +13,8 @@ import javafx.scene.layout.VBox;
 import javafx.util.StringConverter;
 import org.seepledger.desktop.budget.Reading;
 import org.seepledger.desktop.words.Words;
+import org.seepledger.report.Wording;
+import org.seepledger.unit.Measure;
 
 /** What is chosen above the table: period, rates or volumes, unit, arrangement; and whose budget it is. */
 final class LedgerChoices extends VBox {
@@ -29,6 +31,12 @@ final class LedgerChoices extends VBox {
         belongs.setWrapText(true);
         belongs.getStyleClass().add("sl-belongs");
         belongs.textProperty().bind(model.belongs());
+        Label notes = new Label();
+        notes.setId("ledger-notes");
+        notes.setWrapText(true);
+        notes.getStyleClass().addAll("sl-small", "sl-warning");
+        notes.textProperty().bind(model.notes());
+        notes.managedProperty().bind(notes.textProperty().isNotEmpty());
         Button copy = new Button(Words.of("ledger.copy"));
         copy.setId("ledger-copy");
         copy.setTooltip(new Tooltip(Words.of("ledger.copy.tip")));
@@ -41,8 +49,10 @@ final class LedgerChoices extends VBox {
                 units,
                 box("ledger-arrangement", List.of(Arrangement.values()), LedgerChoices::arranged, model.arrangement()),
                 copy);
-        getChildren().addAll(belongs, choices);
+        getChildren().addAll(belongs, notes, choices);
         units.setId("ledger-unit");
+        units.setMinWidth(96);
+        units.setConverter(converter(LedgerChoices::unit));
         units.setOnAction(chosen -> take());
         reading.changes().addListener((changes, before, after) -> fill());
         fill();
@@ -50,8 +60,17 @@ final class LedgerChoices extends VBox {
 
     private ChoiceBox<org.seepledger.balance.Periods.Every> periods() {
         var box = box("ledger-period", reading.choices(), LedgerChoices::every, reading.every());
-        reading.dated().addListener((dated, before, after) -> box.getItems().setAll(reading.choices()));
+        box.setMinWidth(112);
+        reading.dated().addListener((dated, before, after) -> {
+            box.getItems().setAll(reading.choices());
+            box.setValue(reading.every().get());
+        });
         return box;
+    }
+
+    /** The unit with its powers raised. */
+    private static String unit(String unit) {
+        return Wording.raised(Measure.of(unit));
     }
 
     private static String amounts(boolean volumes) {
@@ -70,17 +89,7 @@ final class LedgerChoices extends VBox {
             String id, List<T> choices, Function<T, String> words, Property<? super T> chosen) {
         ChoiceBox<T> box = new ChoiceBox<>();
         box.setId(id);
-        box.setConverter(new StringConverter<>() {
-            @Override
-            public String toString(T choice) {
-                return choice == null ? "" : words.apply(choice);
-            }
-
-            @Override
-            public T fromString(String text) {
-                throw new UnsupportedOperationException();
-            }
-        });
+        box.setConverter(converter(words));
         box.getItems().setAll(choices);
         @SuppressWarnings("unchecked")
         Property<T> property = (Property<T>) chosen;
@@ -92,6 +101,20 @@ final class LedgerChoices extends VBox {
         property.addListener((value, before, after) -> box.setValue(after));
         box.setValue(property.getValue());
         return box;
+    }
+
+    private static <T> StringConverter<T> converter(Function<T, String> words) {
+        return new StringConverter<>() {
+            @Override
+            public String toString(T choice) {
+                return choice == null ? "" : words.apply(choice);
+            }
+
+            @Override
+            public T fromString(String text) {
+                throw new UnsupportedOperationException();
+            }
+        };
     }
 
     private void fill() {

@@ -1,5 +1,6 @@
 package org.seepledger.desktop.ledger;
 
+import java.util.List;
 import java.util.Optional;
 import java.util.stream.DoubleStream;
 import javafx.beans.property.ObjectProperty;
@@ -32,6 +33,7 @@ public final class LedgerModel {
     private final CopyBoard copies;
     private final ObservableList<LedgerRow> rows = FXCollections.observableArrayList();
     private final ReadOnlyStringWrapper belongs = new ReadOnlyStringWrapper("");
+    private final ReadOnlyStringWrapper notes = new ReadOnlyStringWrapper("");
     private final ReadOnlyStringWrapper unit = new ReadOnlyStringWrapper("");
     private final ReadOnlyObjectWrapper<PaneState> state = new ReadOnlyObjectWrapper<>(PaneState.READY);
     private final ObjectProperty<Arrangement> arrangement = new SimpleObjectProperty<>(Arrangement.ITEMS);
@@ -69,6 +71,16 @@ public final class LedgerModel {
     /** {@return which geometry and time the rows belong to} */
     public ReadOnlyStringProperty belongs() {
         return belongs.getReadOnlyProperty();
+    }
+
+    /** {@return what was done to the prism before it was balanced; empty for nothing} */
+    public ReadOnlyStringProperty notes() {
+        return notes.getReadOnlyProperty();
+    }
+
+    /** Asks the map to begin a prism. */
+    public void draw() {
+        live.draw();
     }
 
     /** {@return the unit of the numbers} */
@@ -165,17 +177,18 @@ public final class LedgerModel {
     }
 
     private void show(OpenSet set, BudgetShown shown) {
-        Period period = shown.budget().period();
-        var layers = set.aquifer().layers().stream().map(Layer::name).toList();
-        rows.setAll(new LedgerRows(shown.budget(), layers, reading.factor(set, period), order.get())
+        List<String> layers = set.aquifer().layers().stream().map(Layer::name).toList();
+        rows.setAll(new LedgerRows(shown.budget(), layers, reading.shown(set), order.get())
                 .arranged(arrangement.get()));
-        unit.set(reading.unitShown(set));
+        unit.set(reading.unitName(set));
         belongs.set(shown.whose(set));
+        notes.set(String.join(" ", shown.notes()));
     }
 
     private void clear() {
         rows.clear();
         belongs.set("");
+        notes.set("");
     }
 
     private void showState() {

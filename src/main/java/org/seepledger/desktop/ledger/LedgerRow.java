@@ -2,6 +2,7 @@ package org.seepledger.desktop.ledger;
 
 import org.seepledger.ledger.Group;
 import org.seepledger.ledger.Line;
+import org.seepledger.unit.Figures;
 
 /**
  * A row of the ledger. Numbers are in the unit shown; NaN where there is none.
@@ -32,6 +33,19 @@ public record LedgerRow(
 
     static LedgerRow heading(Group group, int layer, String label) {
         return new LedgerRow(Kind.HEADING, group, "", layer, label, Double.NaN, Double.NaN, Double.NaN);
+    }
+
+    /**
+     * {@return how one of its numbers is to be read; nothing where a row of its kind has none}
+     *
+     * @param value the number
+     */
+    public String text(double value) {
+        boolean oneNumber = kind == Kind.TOTAL || kind == Kind.PERCENTAGE;
+        if (kind == Kind.HEADING || oneNumber && Double.compare(value, net) != 0) {
+            return "";
+        }
+        return kind == Kind.PERCENTAGE ? Figures.typesetPercent(value) : Figures.tabular(value);
     }
 
     /** {@return whether it is about a face that can be lit up on the map} */

@@ -9,6 +9,7 @@ import org.seepledger.ledger.Line;
 import org.seepledger.ledger.PeriodBudget;
 import org.seepledger.ledger.Total;
 import org.seepledger.ledger.Totals;
+import org.seepledger.picture.UnitShown;
 import org.seepledger.report.Term;
 
 /** Lays a budget out in rows. */
@@ -16,7 +17,7 @@ final class LedgerRows {
 
     private final PeriodBudget budget;
     private final List<String> layers;
-    private final double factor;
+    private final UnitShown unit;
     private final Order order;
     private final List<LedgerRow> rows = new ArrayList<>();
 
@@ -25,13 +26,13 @@ final class LedgerRows {
      *
      * @param budget the budget
      * @param layers the names of the aquifer's layers
-     * @param factor what volumes are multiplied by
+     * @param unit the unit to show
      * @param order the order of lines in a section
      */
-    LedgerRows(PeriodBudget budget, List<String> layers, double factor, Order order) {
+    LedgerRows(PeriodBudget budget, List<String> layers, UnitShown unit, Order order) {
         this.budget = budget;
         this.layers = layers;
-        this.factor = factor;
+        this.unit = unit;
         this.order = order;
     }
 
@@ -92,9 +93,13 @@ final class LedgerRows {
                 line.item(),
                 line.layer(),
                 label,
-                line.inflow() * factor,
-                line.outflow() * factor,
-                line.net() * factor);
+                amount(line.inflow()),
+                amount(line.outflow()),
+                amount(line.net()));
+    }
+
+    private double amount(double volume) {
+        return unit.of(volume, budget.period());
     }
 
     private void totals() {
@@ -102,7 +107,7 @@ final class LedgerRows {
         rows.add(LedgerRow.heading(Group.TOTAL, Line.ALL_LAYERS, Words.of("ledger.totals")));
         for (Total total : Total.rows(!Double.isNaN(totals.storageChange()))) {
             LedgerRow.Kind kind = total.isPercentage() ? LedgerRow.Kind.PERCENTAGE : LedgerRow.Kind.TOTAL;
-            double value = totals.get(total) * (total.isPercentage() ? 1 : factor);
+            double value = total.isPercentage() ? totals.get(total) : amount(totals.get(total));
             rows.add(new LedgerRow(
                     kind, Group.TOTAL, total.toString(), Line.ALL_LAYERS, total.toString(), Double.NaN, Double.NaN, value));
         }

@@ -36,7 +36,7 @@ public final class LedgerView extends BorderPane {
         getStyleClass().add("sl-ledger");
         setTop(new LedgerChoices(model));
         buildTable();
-        setCenter(new StatePane(table, model.state()));
+        setCenter(new StatePane(table, model.state()).withAction(Words.of("budget.draw"), model::draw));
     }
 
     private void buildTable() {
@@ -82,8 +82,8 @@ public final class LedgerView extends BorderPane {
     private TableColumn<LedgerRow, LedgerRow> nameColumn() {
         TableColumn<LedgerRow, LedgerRow> column = new TableColumn<>();
         column.setGraphic(header("ledger.item", Order.AS_DRAWN));
-        column.setMinWidth(120);
-        column.setPrefWidth(170);
+        column.setMinWidth(110);
+        column.setPrefWidth(136);
         return shown(column, new NameCell.Factory());
     }
 
@@ -91,8 +91,8 @@ public final class LedgerView extends BorderPane {
         TableColumn<LedgerRow, LedgerRow> column = new TableColumn<>();
         column.setGraphic(header(words, order));
         column.getStyleClass().add("sl-numbers");
-        column.setMinWidth(86);
-        column.setPrefWidth(86);
+        column.setMinWidth(102);
+        column.setPrefWidth(102);
         return shown(column, new NumberCell.Factory(value));
     }
 

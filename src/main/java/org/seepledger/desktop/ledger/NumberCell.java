@@ -4,7 +4,6 @@ import java.util.function.ToDoubleFunction;
 import javafx.scene.control.TableCell;
 import javafx.scene.control.TableColumn;
 import javafx.util.Callback;
-import org.seepledger.unit.Figures;
 
 /** A number of a row, to four significant digits; nothing where a row of its kind has none. */
 final class NumberCell extends TableCell<LedgerRow, LedgerRow> {
@@ -27,22 +26,12 @@ final class NumberCell extends TableCell<LedgerRow, LedgerRow> {
 
     private NumberCell(Value value) {
         this.value = value;
-        getStyleClass().add("sl-number");
+        getStyleClass().add("sl-figure");
     }
 
     @Override
     protected void updateItem(LedgerRow row, boolean empty) {
         super.updateItem(row, empty);
-        setText(empty || row == null ? "" : text(row, value.applyAsDouble(row)));
-    }
-
-    static String text(LedgerRow row, double value) {
-        boolean oneNumber = row.kind() == LedgerRow.Kind.TOTAL || row.kind() == LedgerRow.Kind.PERCENTAGE;
-        if (row.kind() == LedgerRow.Kind.HEADING || oneNumber && Double.compare(value, row.net()) != 0) {
-            return "";
-        }
-        return row.kind() == LedgerRow.Kind.PERCENTAGE
-                ? Figures.percent(value).replace('-', '−')
-                : Figures.typeset(value);
+        setText(empty || row == null ? "" : row.text(value.applyAsDouble(row)));
     }
 }

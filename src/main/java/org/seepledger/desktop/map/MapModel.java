@@ -11,11 +11,16 @@ import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.job.WellPlace;
+import org.seepledger.report.CellPlace;
 
 /** What the map shows: which part of it, which values, and where the cursor is. */
 public final class MapModel {
 
     private static final double MARGIN = 48;
+
+    /** How many pixels a cell has at least after the map went to it. */
+    private static final double CELL_SEEN = 24;
+
     private static final double FARTHEST = 0.25;
     private static final double NEAREST_CELL = 600;
     private static final double STEP = 1.25;
@@ -47,6 +52,18 @@ public final class MapModel {
             findWells();
         });
         session.interval().addListener((interval, before, after) -> findWells());
+        session.target().addListener((target, before, after) -> after.ifPresent(this::goTo));
+    }
+
+    /** Puts a cell into the middle, near enough to be seen among its neighbours. */
+    private void goTo(CellPlace place) {
+        Camera seen = camera.get();
+        double nearer = grid().map(grid -> CELL_SEEN
+                        / Math.min(grid.x().smallest(), grid.y().smallest()))
+                .orElse(seen.scale());
+        double scale = limits().within(Math.max(seen.scale(), nearer));
+        camera.set(new Camera(seen.width(), seen.height(), place.x(), place.y(), scale));
+        session.target().set(Optional.empty());
     }
 
     private void findWells() {

@@ -9,21 +9,45 @@ import javafx.scene.layout.Region;
 import org.seepledger.desktop.theme.Theme;
 import org.seepledger.picture.Picture;
 
-/** A picture that is drawn anew for each width, as high as it needs to be. */
+/** A picture that is drawn anew for each size, and as high as it needs to be where it is given no height. */
 public final class PictureView extends Region {
 
-    private final DoubleFunction<Optional<Picture>> pictures;
+    private final ForSize pictures;
     private final ObservableValue<Theme> theme;
     private final Canvas canvas = new Canvas();
-    private double drawnFor = Double.NaN;
+    private double drawnWidth = Double.NaN;
+    private double drawnHeight = Double.NaN;
+
+    /** Gives the picture for a size. */
+    @FunctionalInterface
+    public interface ForSize {
+
+        /**
+         * {@return the picture, if there is one}
+         *
+         * @param width in logical pixels
+         * @param height in logical pixels
+         */
+        Optional<Picture> of(double width, double height);
+    }
 
     /**
-     * Shows pictures.
+     * Shows pictures that are as high as they need to be.
      *
      * @param pictures gives the picture for a width in logical pixels, if there is one
      * @param theme gives its inks their colours
      */
     public PictureView(DoubleFunction<Optional<Picture>> pictures, ObservableValue<Theme> theme) {
+        this((width, height) -> pictures.apply(width), theme);
+    }
+
+    /**
+     * Shows pictures that fill their room.
+     *
+     * @param pictures gives the picture for a size
+     * @param theme gives its inks their colours
+     */
+    public PictureView(ForSize pictures, ObservableValue<Theme> theme) {
         this.pictures = pictures;
         this.theme = theme;
         setAccessibleRole(AccessibleRole.IMAGE_VIEW);
@@ -33,16 +57,18 @@ public final class PictureView extends Region {
 
     /** Draws it anew, since what it shows has changed. */
     public void redraw() {
-        drawnFor = Double.NaN;
+        drawnWidth = Double.NaN;
         requestLayout();
     }
 
     @Override
     protected void layoutChildren() {
         double width = Math.floor(getWidth());
-        if (width > 0 && width != drawnFor) {
-            drawnFor = width;
-            pictures.apply(width).ifPresentOrElse(this::draw, this::clear);
+        double height = Math.floor(getHeight());
+        if (width > 0 && (width != drawnWidth || height != drawnHeight)) {
+            drawnWidth = width;
+            drawnHeight = height;
+            pictures.of(width, height).ifPresentOrElse(this::draw, this::clear);
         }
     }
 

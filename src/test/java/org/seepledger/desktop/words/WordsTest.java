@@ -33,7 +33,11 @@ class WordsTest {
     void everyKeyInUseHasWords() throws IOException {
         Matcher keys = KEY.matcher(sources());
         while (keys.find()) {
-            assertThat(BUNDLE.containsKey(keys.group(1))).as(keys.group(1)).isTrue();
+            String key = keys.group(1);
+            boolean known = key.endsWith(".")
+                    ? BUNDLE.keySet().stream().anyMatch(other -> other.startsWith(key))
+                    : BUNDLE.containsKey(key);
+            assertThat(known).as(key).isTrue();
         }
     }
 
