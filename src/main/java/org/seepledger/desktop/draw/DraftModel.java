@@ -35,6 +35,12 @@ public final class DraftModel {
      */
     public DraftModel(Session session) {
         this.session = session;
+        session.demand().addListener((demand, before, after) -> {
+            if (after == Session.Demand.DRAW_PRISM) {
+                session.demand().set(Session.Demand.NONE);
+                choose(Tool.POLYGON);
+            }
+        });
     }
 
     /**
