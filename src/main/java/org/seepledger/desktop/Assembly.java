@@ -7,6 +7,11 @@ import javafx.scene.Scene;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.desktop.action.Action;
 import org.seepledger.desktop.action.Actions;
+import org.seepledger.desktop.draw.DraftActions;
+import org.seepledger.desktop.draw.DraftFiles;
+import org.seepledger.desktop.draw.DraftHand;
+import org.seepledger.desktop.draw.DraftModel;
+import org.seepledger.desktop.draw.Tray;
 import org.seepledger.desktop.folio.Folio;
 import org.seepledger.desktop.map.MapModel;
 import org.seepledger.desktop.map.MapView;
@@ -15,7 +20,6 @@ import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.port.Questions;
 import org.seepledger.desktop.port.RecentFolders;
-import org.seepledger.desktop.session.Drawing;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Opening;
 import org.seepledger.desktop.session.Session;
@@ -36,6 +40,11 @@ final class Assembly {
     private final ShellModel shell = new ShellModel(session);
     private final WelcomeModel welcome;
     private final MapModel map;
+    private final DraftModel draft;
+    private final DraftHand hand;
+    private final DraftFiles files;
+    private final Tray tray;
+    private final MapView mapView;
     private final ShellView view;
     private final Scene scene;
 
@@ -45,9 +54,15 @@ final class Assembly {
     Assembly(Outside outside, List<Path> samplePlaces) {
         this.outside = outside;
         this.map = new MapModel(session, outside.tasks());
-        this.welcome = new WelcomeModel(outside.tasks(), outside.dialogs(), outside.folders(), this::show);
+        this.welcome = new WelcomeModel(outside.tasks(), outside.dialogs(), outside.folders(), this::show, go -> files().whenSafe(go));
         Actions actions = new Actions();
-        MapView mapView = new MapView(map, outside.tasks(), shell.theme());
+        this.draft = new DraftModel(session);
+        this.hand = new DraftHand(draft);
+        this.files = new DraftFiles(draft, outside.tasks(), outside.dialogs(), outside.questions());
+        this.tray = new Tray(draft, hand);
+        this.mapView = new MapView(map, outside.tasks(), shell.theme(), hand, tray);
+        draft.version().addListener((version, before, after) -> mapView.repaint());
+        draft.tool().addListener((tool, before, after) -> mapView.repaint());
         Folio folio = new Folio(session, outside.tasks(), outside.copies(), shell.theme());
         Slots slots = new Slots(
                 new WelcomeView(welcome),
@@ -58,6 +73,7 @@ final class Assembly {
         this.view = new ShellView(shell, slots, actions);
         actions.add(actionsOfWindow());
         actions.add(mapView.actions());
+        actions.add(new DraftActions(draft, hand, files, tray, mapView::repaint).all(map));
         actions.add(folio.actions());
         this.scene = new Scene(view, 1280, 800);
         Dress.put(scene, shell.theme());
@@ -83,11 +99,9 @@ final class Assembly {
     private void show(Opening opening) {
         Optional<OpenSet> before = session.set().get();
         session.show(Optional.of(opening.set()));
-        session.drawing().set(new Drawing(session.drawing().get().revision() + 1, opening.prisms(), true));
-        opening.prisms().stream()
-                .findFirst()
-                .ifPresent(prism -> session.selected().set(prism.name()));
         session.status().set(opened(opening.set().aquifer()));
+        files.begin(opening);
+        mapView.focus();
         before.ifPresent(this::putAway);
     }
 
@@ -123,6 +137,18 @@ final class Assembly {
 
     ShellModel shell() {
         return shell;
+    }
+
+    DraftFiles files() {
+        return files;
+    }
+
+    Tray tray() {
+        return tray;
+    }
+
+    DraftModel draft() {
+        return draft;
     }
 
     MapModel map() {

@@ -39,6 +39,10 @@ public final class WindowApplication extends Application {
         stage.setMinWidth(LEAST_WIDTH);
         stage.setMinHeight(LEAST_HEIGHT);
         stage.setScene(assembly.scene());
+        stage.setOnCloseRequest(request -> {
+            request.consume();
+            assembly.files().whenSafe(stage::hide);
+        });
         getParameters().getRaw().stream().findFirst().map(Path::of).ifPresent(assembly.welcome()::open);
         stage.show();
     }

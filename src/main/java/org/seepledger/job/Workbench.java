@@ -20,6 +20,9 @@ import org.seepledger.fault.UsageFault;
 import org.seepledger.io.aquifer.AquiferFolder;
 import org.seepledger.io.aquifer.AquiferReader;
 import org.seepledger.io.crs.PlanCrs;
+import org.seepledger.io.DataFolder;
+import org.seepledger.io.prisms.DrawingReader;
+import org.seepledger.io.prisms.DrawingWriter;
 import org.seepledger.io.prisms.PrismsReader;
 import org.seepledger.io.prisms.SurfaceRasters;
 import org.seepledger.io.result.Provenance;
@@ -29,6 +32,7 @@ import org.seepledger.ledger.PeriodBudget;
 import org.seepledger.prism.Prism;
 import org.seepledger.progress.Cancelled;
 import org.seepledger.progress.Progress;
+import org.seepledger.sketch.Drawing;
 import org.seepledger.unit.Measure;
 
 /**
@@ -136,6 +140,38 @@ public final class Workbench implements AutoCloseable {
                 return new PrismsFile(reader(notes::add).asDrawn(file, file.toString()), notes);
             }
         });
+    }
+
+    /**
+     * {@return the drawing that a file holds, to go on with it, and the surfaces that it names; their rasters stay open as
+     * long as the workbench}
+     *
+     * @param file a GeoJSON file
+     * @throws org.seepledger.fault.DataFault if it is damaged, or a surface cannot be read
+     */
+    public DrawingFile drawing(Path file) {
+        return ask(Progress.NONE, progress -> {
+            List<String> notes = new ArrayList<>();
+            String shown = file.toString();
+            Drawing drawing = new DrawingReader(crs(), aquifer().layers().size(), notes::add).read(file, shown);
+            synchronized (surfaces) {
+                return DrawingFile.of(drawing, DataFolder.holding(file, shown), surfaces, notes);
+            }
+        });
+    }
+
+    /**
+     * Writes a drawing; the file appears whole or not at all.
+     *
+     * @param file the file, which is replaced if it exists
+     * @param drawing the drawing
+     * @throws UsageFault if it cannot be written
+     */
+    public void write(Path file, Drawing drawing) {
+        Optional<String> named = crs().isLocal()
+                ? Optional.empty()
+                : crs().code().or(() -> Optional.of(crs().wkt()));
+        DrawingWriter.write(file, named, drawing);
     }
 
     private PrismsReader reader(Consumer<String> notes) {

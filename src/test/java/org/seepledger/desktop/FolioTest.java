@@ -10,6 +10,8 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Collectors;
+import javafx.scene.Node;
+import javafx.scene.control.Button;
 import javafx.scene.control.ChoiceBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.TableView;
@@ -20,6 +22,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.seepledger.balance.Periods;
 import org.seepledger.balance.WellRule;
+import org.seepledger.desktop.draw.Tool;
 import org.seepledger.desktop.ledger.LedgerRow;
 import org.seepledger.desktop.map.Camera;
 import org.seepledger.desktop.session.Drawing;
@@ -102,6 +105,7 @@ class FolioTest {
         openSet(VALLEY);
         window.robot.clickOn("#sort-largest-out");
         window.await(() -> labels().get(1).equals("side 3"));
+        window.settle();
         window.robot.clickOn("side 4");
         assertThat(session().lit().get()).isEqualTo("side 4");
         window.robot.interact(() -> session().lit().set("pit edge"));
@@ -169,7 +173,12 @@ class FolioTest {
                 .tryQuery()
                 .isPresent());
         draw(List.of(), true);
-        window.await(() -> window.robot.lookup("Draw a prism").tryQuery().isPresent());
+        Button begin = window.robot.from(window.robot.lookup("#ledger").<Node>query())
+                .lookup("Draw a prism")
+                .queryButton();
+        window.await(begin::isVisible);
+        window.robot.clickOn(begin);
+        assertThat(window.assembly().draft().tool().get()).isEqualTo(Tool.POLYGON);
     }
 
     @Test

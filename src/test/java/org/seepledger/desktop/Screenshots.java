@@ -29,7 +29,23 @@ public final class Screenshots {
                 both(window, folder, "welcome", suffix);
                 window.openSet(Path.of("sample-aquifers/valley"));
                 window.settle();
+                window.settle();
                 both(window, folder, "map", suffix);
+                for (String page : new String[] {"answers", "exchange", "ledger"}) {
+                    window.robot.clickOn("#folio-" + page);
+                    both(window, folder, page, suffix);
+                }
+                window.robot.interact(() -> {
+                    window.assembly().map().showPrism();
+                    window.assembly().tray().flipCard();
+                });
+                window.robot.press(javafx.scene.input.KeyCode.TAB).release(javafx.scene.input.KeyCode.TAB);
+                window.settle();
+                both(window, folder, "draw", suffix);
+                window.robot.interact(() -> window.assembly().tray().flipCard());
+                window.robot.press(javafx.scene.input.KeyCode.F1).release(javafx.scene.input.KeyCode.F1);
+                window.settle();
+                both(window, folder, "actions", suffix);
             }
         }
         System.exit(0);

@@ -1,5 +1,6 @@
 package org.seepledger.desktop.action;
 
+import javafx.geometry.Pos;
 import javafx.scene.control.Label;
 import javafx.scene.control.ListCell;
 import javafx.scene.control.ListView;
@@ -91,12 +92,13 @@ public final class ActionsPage extends VBox {
         private static HBox row(Action action) {
             Label group = new Label(action.groupWords());
             group.getStyleClass().add("sl-muted");
-            group.setMinWidth(90);
+            group.setMinWidth(110);
             Region gap = new Region();
             HBox.setHgrow(gap, Priority.ALWAYS);
             Label keys = new Label(KeyCombination.valueOf(action.keys()).getDisplayText());
             keys.getStyleClass().add("sl-key");
             HBox row = new HBox(10, group, new Label(action.words()), gap, keys);
+            row.setAlignment(Pos.CENTER_LEFT);
             row.setDisable(!action.possible().getAsBoolean());
             return row;
         }

@@ -63,7 +63,7 @@ public final class FaceFeed {
                     net.put(term.item(), term.net() / interval.duration() * units.rateFactor());
                 }
             }
-            long revision = shown.prism().equals(prism) ? drawing.revision() : drawing.revision() - 1;
+            long revision = shown.prism().equals(prism) ? drawing.revision() : FaceFlows.NONE.revision();
             return new FaceFlows(revision, prism.name(), units.rate().toString(), net);
         });
     }

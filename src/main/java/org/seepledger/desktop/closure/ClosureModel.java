@@ -51,7 +51,7 @@ public final class ClosureModel {
         this.session = session;
         this.live = live;
         this.reading = reading;
-        live.known().addListener((known, before, after) -> show());
+        live.whole().addListener((whole, before, after) -> show());
         session.selected().addListener((selected, before, after) -> show());
         reading.changes().addListener((changes, before, after) -> show());
         show();
@@ -124,7 +124,7 @@ public final class ClosureModel {
         notes.clear();
         belongs.set("");
         Optional<OpenSet> set = session.set().get();
-        Optional<RecordBudget> record = live.known().get().record();
+        Optional<RecordBudget> record = live.whole().get();
         if (set.isPresent() && record.isPresent()) {
             List<String> names = record.get().prisms().stream().map(Prism::name).toList();
             int prism = names.indexOf(session.selected().get());

@@ -14,23 +14,39 @@ import org.seepledger.picture.MapFrame;
  */
 public record Camera(double width, double height, double centreX, double centreY, double scale) {
 
-    /** {@return the x on the screen of a map x} */
-    double x(double mapX) {
+    /**
+     * {@return the x on the screen of a map x}
+     *
+     * @param mapX in plan units
+     */
+    public double x(double mapX) {
         return width / 2 + (mapX - centreX) * scale;
     }
 
-    /** {@return the y on the screen of a map y} */
-    double y(double mapY) {
+    /**
+     * {@return the y on the screen of a map y}
+     *
+     * @param mapY in plan units
+     */
+    public double y(double mapY) {
         return height / 2 - (mapY - centreY) * scale;
     }
 
-    /** {@return the map x of an x on the screen} */
-    double mapX(double x) {
+    /**
+     * {@return the map x of an x on the screen}
+     *
+     * @param x in logical pixels
+     */
+    public double mapX(double x) {
         return centreX + (x - width / 2) / scale;
     }
 
-    /** {@return the map y of a y on the screen} */
-    double mapY(double y) {
+    /**
+     * {@return the map y of a y on the screen}
+     *
+     * @param y in logical pixels
+     */
+    public double mapY(double y) {
         return centreY - (y - height / 2) / scale;
     }
 

@@ -10,7 +10,7 @@ import org.seepledger.picture.Mark;
 /** The lines between cells, where they are far enough apart to help; on device pixels where the grid is not turned. */
 final class GridLines {
 
-    private static final double APART = 14;
+    private static final double APART = 22;
 
     private final Grid grid;
     private final Camera camera;

@@ -5,12 +5,11 @@ import javafx.beans.value.ObservableValue;
 import javafx.geometry.Insets;
 import javafx.geometry.Pos;
 import javafx.scene.Cursor;
-import javafx.scene.input.KeyCode;
-import javafx.scene.input.KeyEvent;
 import javafx.scene.input.MouseButton;
 import javafx.scene.input.MouseEvent;
 import javafx.scene.input.ScrollEvent;
 import javafx.scene.layout.BorderPane;
+import javafx.scene.layout.Region;
 import javafx.scene.layout.StackPane;
 import org.seepledger.desktop.action.Action;
 import org.seepledger.desktop.pane.StatePane;
@@ -22,10 +21,11 @@ public final class MapView extends BorderPane {
 
     private static final double NOTCH = 40;
     private static final double PER_NOTCH = 1.2;
-    private static final double ARROW_KEY = 60;
 
     private final MapModel model;
     private final MapCanvas canvas;
+    private final Hand hand;
+    private boolean panning;
     private double lastX;
     private double lastY;
 
@@ -35,9 +35,12 @@ public final class MapView extends BorderPane {
      * @param model the map
      * @param tasks colours tiles
      * @param theme gives colours
+     * @param hand works on the map
+     * @param tray what the hand works with, laid over the map
      */
-    public MapView(MapModel model, Tasks tasks, ObservableValue<Theme> theme) {
+    public MapView(MapModel model, Tasks tasks, ObservableValue<Theme> theme, Hand hand, Region tray) {
         this.model = model;
+        this.hand = hand;
         this.canvas = new MapCanvas(model, tasks, theme);
         setId("map");
         canvas.setId("map-canvas");
@@ -45,9 +48,12 @@ public final class MapView extends BorderPane {
         canvas.getStyleClass().add("sl-map");
         Legend legend = new Legend(model.values(), theme);
         LayerColumn layers = new LayerColumn(model.session());
-        StackPane stack = new StackPane(canvas, legend, layers);
+        StackPane stack = new StackPane(canvas, legend, layers, tray);
+        canvas.invite(hand::marks);
         StackPane.setAlignment(legend, Pos.BOTTOM_RIGHT);
         StackPane.setAlignment(layers, Pos.TOP_LEFT);
+        StackPane.setAlignment(tray, Pos.TOP_RIGHT);
+        StackPane.setMargin(tray, new Insets(14));
         StackPane.setMargin(legend, new Insets(14));
         StackPane.setMargin(layers, new Insets(14));
         setCenter(new StatePane(stack, model.values().state()));
@@ -56,26 +62,83 @@ public final class MapView extends BorderPane {
         canvas.setCursor(Cursor.OPEN_HAND);
         canvas.addEventHandler(MouseEvent.MOUSE_PRESSED, this::onPressed);
         canvas.addEventHandler(MouseEvent.MOUSE_DRAGGED, this::onDragged);
-        canvas.addEventHandler(MouseEvent.MOUSE_RELEASED, release -> canvas.setCursor(Cursor.OPEN_HAND));
-        canvas.addEventHandler(MouseEvent.MOUSE_MOVED, move -> model.point(move.getX(), move.getY()));
+        canvas.addEventHandler(MouseEvent.MOUSE_RELEASED, this::onReleased);
+        canvas.addEventHandler(MouseEvent.MOUSE_MOVED, this::onMoved);
         canvas.addEventHandler(MouseEvent.MOUSE_EXITED, left -> model.leave());
         canvas.addEventHandler(ScrollEvent.SCROLL, this::onScroll);
-        canvas.addEventHandler(KeyEvent.KEY_PRESSED, this::onKey);
+    }
+
+    /** Moves the keyboard to the map. */
+    public void focus() {
+        canvas.requestFocus();
+    }
+
+    /** Paints anew what the hand draws. */
+    public void repaint() {
+        canvas.repaint();
+        canvas.setCursor(cursor());
+    }
+
+    private Touch touch(MouseEvent mouse) {
+        Camera camera = model.camera().get();
+        return new Touch(
+                camera.mapX(mouse.getX()),
+                camera.mapY(mouse.getY()),
+                1 / camera.scale(),
+                mouse.isAltDown(),
+                mouse.isShiftDown());
+    }
+
+    private Cursor cursor() {
+        if (panning) {
+            return Cursor.CLOSED_HAND;
+        }
+        return switch (hand.aim()) {
+            case PAN -> Cursor.OPEN_HAND;
+            case DRAW -> Cursor.CROSSHAIR;
+            case MOVE -> Cursor.MOVE;
+            case CHOOSE -> Cursor.HAND;
+        };
     }
 
     private void onPressed(MouseEvent press) {
         canvas.requestFocus();
         lastX = press.getX();
         lastY = press.getY();
-        canvas.setCursor(Cursor.CLOSED_HAND);
+        boolean primary = press.getButton() == MouseButton.PRIMARY;
+        if (primary && press.getClickCount() == 2) {
+            hand.doubleClick(touch(press));
+            panning = false;
+        } else {
+            panning = !primary || !hand.press(touch(press));
+        }
+        repaint();
     }
 
     private void onDragged(MouseEvent drag) {
-        if (drag.getButton() != MouseButton.NONE) {
+        if (panning) {
             model.drag(drag.getX() - lastX, drag.getY() - lastY);
             lastX = drag.getX();
             lastY = drag.getY();
+            return;
         }
+        hand.drag(touch(drag));
+        model.point(drag.getX(), drag.getY());
+        repaint();
+    }
+
+    private void onReleased(MouseEvent release) {
+        if (!panning) {
+            hand.release(touch(release));
+        }
+        panning = false;
+        repaint();
+    }
+
+    private void onMoved(MouseEvent move) {
+        hand.hover(touch(move));
+        model.point(move.getX(), move.getY());
+        repaint();
     }
 
     /** Wheels tell notches, touch pads pixels: both give the same speed. */
@@ -84,19 +147,6 @@ public final class MapView extends BorderPane {
             model.zoom(scroll.getX(), scroll.getY(), Math.pow(PER_NOTCH, scroll.getDeltaY() / NOTCH));
             model.point(scroll.getX(), scroll.getY());
             scroll.consume();
-        }
-    }
-
-    private void onKey(KeyEvent key) {
-        if (key.isShortcutDown() || key.isAltDown()) {
-            return;
-        }
-        KeyCode code = key.getCode();
-        if (code.isArrowKey()) {
-            double across = code == KeyCode.LEFT ? ARROW_KEY : code == KeyCode.RIGHT ? -ARROW_KEY : 0;
-            double down = code == KeyCode.UP ? ARROW_KEY : code == KeyCode.DOWN ? -ARROW_KEY : 0;
-            model.drag(across, down);
-            key.consume();
         }
     }
 

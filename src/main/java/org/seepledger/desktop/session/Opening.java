@@ -2,22 +2,26 @@ package org.seepledger.desktop.session;
 
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.List;
+import java.util.Optional;
 import org.seepledger.desktop.task.EntryGuard;
 import org.seepledger.io.aquifer.AquiferReader;
+import org.seepledger.job.DrawingFile;
 import org.seepledger.job.Workbench;
-import org.seepledger.prism.Prism;
 
 /**
  * A folder as it was opened.
  *
  * @param set the set
- * @param prisms the prisms that lie beside it, if any
+ * @param kept the prisms that lie beside it
+ * @param unsaved prisms that were drawn and not saved when the program last ended
  */
-public record Opening(OpenSet set, List<Prism> prisms) {
+public record Opening(OpenSet set, DrawingFile kept, Optional<DrawingFile> unsaved) {
 
     /** What the prisms beside an aquifer are called. */
     public static final String PRISMS = "prisms.geojson";
+
+    /** What prisms are called that are drawn and not saved. */
+    public static final String UNSAVED = "prisms.unsaved.geojson";
 
     /**
      * Opens an aquifer folder and reads the prisms beside it.
@@ -31,7 +35,8 @@ public record Opening(OpenSet set, List<Prism> prisms) {
         Path path = isSetFile(folder) ? folder.toAbsolutePath().getParent() : folder;
         OpenSet set = new OpenSet(path, Workbench.open(path));
         try {
-            return new Opening(set, prisms(path.resolve(PRISMS), set));
+            return new Opening(
+                    set, drawing(path.resolve(PRISMS), set).orElse(DrawingFile.NONE), drawing(path.resolve(UNSAVED), set));
         } catch (RuntimeException e) {
             set.close();
             throw e;
@@ -42,10 +47,7 @@ public record Opening(OpenSet set, List<Prism> prisms) {
         return path.endsWith(AquiferReader.FILE) && Files.isRegularFile(path);
     }
 
-    private static List<Prism> prisms(Path file, OpenSet set) {
-        if (!Files.isRegularFile(file)) {
-            return List.of();
-        }
-        return set.workbench().read(file).prisms();
+    private static Optional<DrawingFile> drawing(Path file, OpenSet set) {
+        return Files.isRegularFile(file) ? Optional.of(set.workbench().drawing(file)) : Optional.empty();
     }
 }

@@ -1,9 +1,14 @@
 package org.seepledger.desktop.shell;
 
+import java.util.EnumSet;
 import java.util.List;
+import java.util.Set;
 import javafx.geometry.Orientation;
 import javafx.scene.Node;
+import javafx.scene.control.Control;
 import javafx.scene.control.SplitPane;
+import javafx.scene.control.TextInputControl;
+import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyCombination;
 import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.BorderPane;
@@ -14,6 +19,11 @@ import org.seepledger.desktop.action.ActionsPage;
 
 /** The window's frame. */
 public final class ShellView extends StackPane {
+
+    private static final Set<KeyCode> TEXT_COMMANDS =
+            EnumSet.of(KeyCode.A, KeyCode.C, KeyCode.V, KeyCode.X, KeyCode.Z, KeyCode.Y, KeyCode.HOME, KeyCode.END);
+    private static final Set<KeyCode> WORKING_KEYS =
+            EnumSet.of(KeyCode.TAB, KeyCode.ENTER, KeyCode.SPACE, KeyCode.DELETE, KeyCode.BACK_SPACE);
 
     private final ShellModel model;
     private final Actions actions;
@@ -62,7 +72,7 @@ public final class ShellView extends StackPane {
         down.setOrientation(Orientation.VERTICAL);
         slots.ribbon().ifPresent(ribbon -> {
             down.getItems().add(ribbon);
-            down.setDividerPositions(0.78);
+            down.setDividerPositions(0.74);
             SplitPane.setResizableWithParent(ribbon, false);
         });
         return down;
@@ -134,9 +144,9 @@ public final class ShellView extends StackPane {
         focusIn(model.atWelcome().get() ? slots.welcome() : slots.map());
     }
 
-    /** Text fields keep the keys that they use themselves. */
+    /** Text fields keep all keys but commands; other controls those that they work with themselves. */
     private void onKey(KeyEvent key) {
-        if (veil.isVisible() || key.getTarget() instanceof javafx.scene.control.TextInputControl && !isCommand(key)) {
+        if (veil.isVisible() || isKept(key)) {
             return;
         }
         for (Action action : actions.all()) {
@@ -148,7 +158,15 @@ public final class ShellView extends StackPane {
         }
     }
 
-    private static boolean isCommand(KeyEvent key) {
-        return key.getCode().isFunctionKey();
+    private boolean isKept(KeyEvent key) {
+        Node owner = getScene().getFocusOwner();
+        if (key.getCode().isFunctionKey()) {
+            return false;
+        }
+        if (owner instanceof TextInputControl) {
+            return !key.isShortcutDown() || TEXT_COMMANDS.contains(key.getCode());
+        }
+        boolean works = key.getCode().isNavigationKey() || WORKING_KEYS.contains(key.getCode());
+        return owner instanceof Control && works && !key.isShortcutDown();
     }
 }

@@ -24,6 +24,7 @@ public final class WelcomeModel {
     private final FileDialogs dialogs;
     private final RecentFolders folders;
     private final Consumer<Opening> opened;
+    private final Consumer<Runnable> whenSafe;
     private final Lane opening;
     private final Lane looking;
     private final ObservableList<Place> samples = FXCollections.observableArrayList();
@@ -37,8 +38,15 @@ public final class WelcomeModel {
      * @param dialogs asks for a folder
      * @param folders the folders opened lately
      * @param opened gets what was opened
+     * @param whenSafe goes on once no work can be lost
      */
-    public WelcomeModel(Tasks tasks, FileDialogs dialogs, RecentFolders folders, Consumer<Opening> opened) {
+    public WelcomeModel(
+            Tasks tasks,
+            FileDialogs dialogs,
+            RecentFolders folders,
+            Consumer<Opening> opened,
+            Consumer<Runnable> whenSafe) {
+        this.whenSafe = whenSafe;
         this.dialogs = dialogs;
         this.folders = folders;
         this.opened = opened;
@@ -94,6 +102,10 @@ public final class WelcomeModel {
      * @param folder an aquifer folder, or the {@code aquifer.json} in it
      */
     public void open(Path folder) {
+        whenSafe.accept(() -> read(folder));
+    }
+
+    private void read(Path folder) {
         state.set(PaneState.working(Words.of("open.working", folder.getFileName())));
         opening.run(
                 progress -> Opening.of(folder),

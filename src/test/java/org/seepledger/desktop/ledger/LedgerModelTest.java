@@ -154,7 +154,7 @@ class LedgerModelTest {
 
     @Test
     void numbersOfOneColumnHaveFourDigitsAndOneSign() {
-        LedgerRow row = new LedgerRow(Kind.ENTRY, Group.SIDE, "a", 0, "a", 780, 0.5, -1234.5);
+        LedgerRow row = new LedgerRow(Kind.ENTRY, Group.SIDE, "a", 0, "a", 780, 0.5, -1234.4);
         assertThat(row.text(row.inflow())).isEqualTo("780.0");
         assertThat(row.text(row.outflow())).isEqualTo("0.5000");
         assertThat(row.text(row.net())).isEqualTo("−1\u202f234");

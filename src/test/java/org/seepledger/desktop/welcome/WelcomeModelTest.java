@@ -22,7 +22,7 @@ class WelcomeModelTest {
 
     private final GivenAnswers answers = new GivenAnswers();
     private final List<Opening> opened = new ArrayList<>();
-    private final WelcomeModel model = new WelcomeModel(new DirectTasks(), answers, answers, opened::add);
+    private final WelcomeModel model = new WelcomeModel(new DirectTasks(), answers, answers, opened::add, Runnable::run);
 
     @AfterEach
     void close() {
@@ -50,7 +50,7 @@ class WelcomeModelTest {
         answers.paths.add(Optional.of(VALLEY));
         model.choose();
         assertThat(opened).hasSize(1);
-        assertThat(opened.get(0).prisms()).isNotEmpty();
+        assertThat(opened.get(0).kept().drawing().shapes()).isNotEmpty();
         assertThat(model.state().get()).isEqualTo(PaneState.READY);
         assertThat(answers.list()).containsExactly(VALLEY);
         model.look(List.of());
