@@ -98,6 +98,15 @@ class HouseTest {
             .because("a library that reads or writes files can then be changed in one place");
 
     @ArchTest
+    static final ArchRule HTML_STAYS_IN_THE_PAGE = noClasses()
+            .that()
+            .resideOutsideOfPackage(ROOT + "report.page..")
+            .should()
+            .dependOnClassesThat()
+            .resideInAPackage("j2html..")
+            .because("what a report says must be there for the window too, and text is escaped in one place");
+
+    @ArchTest
     static final ArchRule UNIT_LIBRARY_STAYS_IN_UNIT = noClasses()
             .that()
             .resideOutsideOfPackages(ROOT + "unit..", ROOT + "io.crs..")

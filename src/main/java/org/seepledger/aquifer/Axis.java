@@ -127,6 +127,15 @@ public final class Axis {
     }
 
     /**
+     * {@return the cell that a distance from the origin lies in; beyond the axis, the first or last}
+     *
+     * @param distance from the origin, in plan units
+     */
+    public int nearest(double distance) {
+        return Math.max(0, Math.min(count() - 1, cellAt(distance)));
+    }
+
+    /**
      * {@return a place, put on an edge where it lies near one or beyond the axis}
      *
      * @param distance from the first edge, in plan units; beyond the axis by no more than rounding
@@ -136,7 +145,7 @@ public final class Axis {
         if (distance < 0 || distance > edges[count()]) {
             return distance < 0 ? 0 : edges[count()];
         }
-        int cell = Math.max(0, Math.min(count() - 1, cellAt(distance)));
+        int cell = nearest(distance);
         for (int line = cell; line <= cell + 1; line++) {
             if (Math.abs(distance - edges[line]) <= near * size(cell)) {
                 return edges[line];

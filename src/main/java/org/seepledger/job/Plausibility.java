@@ -2,8 +2,8 @@ package org.seepledger.job;
 
 import java.util.ArrayList;
 import java.util.List;
-import org.seepledger.report.Figures;
 import org.seepledger.report.ValueRange;
+import org.seepledger.unit.Figures;
 import org.seepledger.unit.Measure;
 
 /**

@@ -16,7 +16,7 @@ import org.seepledger.ledger.Entry;
 import org.seepledger.ledger.Group;
 import org.seepledger.ledger.PeriodBudget;
 import org.seepledger.prism.Overlap;
-import org.seepledger.report.Figures;
+import org.seepledger.unit.Figures;
 
 /** Puts into words what the reader of a balance must know. */
 final class RunWarnings {

@@ -11,6 +11,7 @@ import org.seepledger.io.aquifer.AquiferFolder;
 import org.seepledger.ledger.Disclaimer;
 import org.seepledger.ledger.PeriodBudget;
 import org.seepledger.ledger.Totals;
+import org.seepledger.unit.Figures;
 import org.seepledger.unit.Measure;
 
 /** What {@code inspect} prints of a set: what it is, its values, how it balances in itself, and what looks wrong. */
@@ -154,7 +155,7 @@ public final class InspectionText {
         facts.fact("throughput", Figures.shown(throughput) + " " + rateUnit);
         facts.fact(
                 "residual",
-                Figures.shown(totals.residual() / time, throughput) + " " + rateUnit + ", "
+                Figures.shown(Figures.withoutRounding(totals.residual() / time, throughput)) + " " + rateUnit + ", "
                         + Figures.percent(totals.closureError()) + " of throughput");
         facts.fact(
                 "cell imbalance",

@@ -1,0 +1,194 @@
+package org.seepledger.picture;
+
+import java.util.ArrayList;
+import java.util.DoubleSummaryStatistics;
+import java.util.List;
+import java.util.Optional;
+import java.util.function.ToDoubleFunction;
+import org.seepledger.aquifer.Aquifer;
+import org.seepledger.balance.HotSpot;
+import org.seepledger.ledger.PeriodBudget;
+import org.seepledger.picture.Mark.Fill;
+import org.seepledger.picture.Mark.Stroke;
+import org.seepledger.prism.Prism;
+import org.seepledger.prism.Side;
+
+/** Maps of a prism: with the flow through its faces, and with what its cells do not balance. */
+public final class MapPicture {
+
+    private static final double LOWEST = 260;
+    private static final double HIGHEST = 460;
+    private static final double AROUND = 0.2;
+    private static final double STRIP = 58;
+
+    /** Colours under contours are thinned, so that what is drawn on them stands out. */
+    private static final double VEILED = 0.55;
+
+    private static final double TOP = 6;
+    private static final double RIGHT = 8;
+    private static final double GAP = 12;
+    private static final double LEGEND = 360;
+
+    private final Aquifer aquifer;
+    private final MapSheet sheet;
+    private final double width;
+    private final double height;
+
+    /**
+     * What lies under a map.
+     *
+     * @param values what is shown as colours
+     * @param scale which colour a value has
+     * @param title what it is
+     * @param unit its unit
+     * @param contoured whether lines of equal value are drawn
+     */
+    public record Ground(Drape values, ValueScale scale, String title, String unit, boolean contoured) {}
+
+    private MapPicture(Aquifer aquifer, Prism subject, List<Prism> others, Optional<Ground> ground, double width) {
+        this.aquifer = aquifer;
+        MapFrame frame = frame(subject, width);
+        this.width = width;
+        this.height = frame.box().bottom() + MapSheet.MARGIN + STRIP;
+        this.sheet = new MapSheet(frame);
+        ground.ifPresent(this::lay);
+        others.forEach(other -> sheet.prism(other, false));
+        sheet.prism(subject, true);
+    }
+
+    /**
+     * {@return where map coordinates come to in the maps of a prism}
+     *
+     * @param subject the prism
+     * @param width of the map, in logical pixels
+     */
+    public static MapFrame frame(Prism subject, double width) {
+        DoubleSummaryStatistics x = coordinates(subject, Side::x);
+        DoubleSummaryStatistics y = coordinates(subject, Side::y);
+        double across = x.getMax() - x.getMin();
+        double up = y.getMax() - y.getMin();
+        double margin = AROUND * Math.max(across, up);
+        double room = width - MapSheet.MARGIN - RIGHT;
+        double height = Math.max(LOWEST, Math.min(HIGHEST, room * (up + 2 * margin) / (across + 2 * margin)));
+        return MapFrame.fitting(
+                new Box(MapSheet.MARGIN, TOP, room, height),
+                x.getMin() - margin,
+                y.getMin() - margin,
+                x.getMax() + margin,
+                y.getMax() + margin);
+    }
+
+    private static DoubleSummaryStatistics coordinates(Prism prism, ToDoubleFunction<Side> coordinate) {
+        return prism.rings().stream()
+                .flatMap(ring -> ring.sides().stream())
+                .mapToDouble(coordinate)
+                .summaryStatistics();
+    }
+
+    private void lay(Ground under) {
+        sheet.drape(under.values(), under.scale(), opacity(under));
+        if (under.contoured()) {
+            sheet.contours(
+                    under.values(),
+                    Ticks.within(under.scale().from(), under.scale().to(), 9));
+        }
+    }
+
+    /**
+     * {@return a map with the net flow through each lateral face as an arrow}
+     *
+     * @param aquifer the aquifer, whose wells are shown
+     * @param subject the prism
+     * @param others the other prisms
+     * @param ground what lies under it
+     * @param line the line of the section, if there is one
+     * @param budget the prism's budget over the record
+     * @param unit the unit to show
+     * @param width in logical pixels
+     */
+    public static Picture ofFaces(
+            Aquifer aquifer,
+            Prism subject,
+            List<Prism> others,
+            Optional<Ground> ground,
+            Optional<SectionLine> line,
+            PeriodBudget budget,
+            UnitShown unit,
+            double width) {
+        MapPicture map = new MapPicture(aquifer, subject, others, ground, width);
+        line.ifPresent(map::drawLine);
+        new FaceArrows(subject, budget, unit).draw(map.sheet);
+        aquifer.placedWells().forEach(map.sheet::well);
+        others.forEach(map.sheet::name);
+        return map.picture(
+                ground,
+                "Map of " + subject.name() + " with the flow through its faces",
+                "Arrows across the faces point inward where water comes in and outward where it leaves; their widths are in"
+                        + " proportion to net flow in " + unit.words() + ".");
+    }
+
+    /**
+     * {@return a map of what cells gain that nothing accounts for}
+     *
+     * @param aquifer the aquifer
+     * @param subject the prism
+     * @param ground the imbalances
+     * @param spots the cells that are furthest from balance, numbered in their order
+     * @param width in logical pixels
+     */
+    public static Picture ofImbalance(
+            Aquifer aquifer, Prism subject, Ground ground, List<HotSpot> spots, double width) {
+        MapPicture map = new MapPicture(aquifer, subject, List.of(), Optional.of(ground), width);
+        for (int i = 0; i < spots.size(); i++) {
+            map.drawSpot(ground.values(), spots.get(i), String.valueOf(i + 1));
+        }
+        return map.picture(
+                Optional.of(ground),
+                "Map of the imbalance of cells in " + subject.name(),
+                "What each cell gains that nothing accounts for, mean over the record; numbered are the cells that are"
+                        + " furthest from balance.");
+    }
+
+    private void drawLine(SectionLine line) {
+        MapFrame frame = sheet.frame();
+        double[] xy = {frame.x(line.fromX()), frame.y(line.fromY()), frame.x(line.toX()), frame.y(line.toY())};
+        sheet.above(new Mark.Line(xy, Stroke.of(Ink.Token.TEXT, 1).dashed(9.0, 3.0, 2.0, 3.0)));
+        List<Mark> ends = new ArrayList<>();
+        sheet.labels().place(List.of(end(xy[0], xy[1], "A")), ends);
+        sheet.labels().place(List.of(end(xy[2], xy[3], "A′")), ends);
+        ends.forEach(sheet::above);
+    }
+
+    private static Mark.Text end(double x, double y, String name) {
+        return Mark.Text.of(x, y - 5, name, 13, Mark.Anchor.MIDDLE).strong().haloed();
+    }
+
+    private void drawSpot(Drape values, HotSpot spot, String number) {
+        double x = sheet.frame().x(values.mapX(spot.row(), spot.column()));
+        double y = sheet.frame().y(values.mapY(spot.row(), spot.column()));
+        sheet.above(new Mark.Area(
+                List.of(MapSheet.round(x, y, 7)),
+                Optional.of(Fill.of(Ink.Token.PAPER)),
+                Optional.of(Stroke.of(Ink.Token.RESIDUAL, 1.6))));
+        sheet.above(Mark.Text.of(x, y + 3.5, number, 10, Mark.Anchor.MIDDLE).strong());
+    }
+
+    private Picture picture(Optional<Ground> ground, String title, String description) {
+        List<Mark> marks = new ArrayList<>(sheet.marks());
+        Box box = sheet.frame().box();
+        double strip = box.bottom() + MapSheet.MARGIN + 2;
+        marks.addAll(NorthArrow.marks(box.x(), strip));
+        double scale = sheet.frame().scale() / aquifer.grid().planUnit();
+        ScaleBar bar = ScaleBar.within(scale, aquifer.lengthUnit().toString(), width / 4);
+        marks.addAll(bar.marks(box.x() + NorthArrow.WIDTH + GAP, strip + 8));
+        double left = box.x() + NorthArrow.WIDTH + bar.width() + 3 * GAP;
+        Box room = new Box(left, strip, Math.min(LEGEND, box.right() - left), RampLegend.LEVEL_HEIGHT);
+        ground.ifPresent(under -> marks.addAll(
+                RampLegend.level(under.scale(), opacity(under), under.title() + ", " + under.unit(), room)));
+        return new Picture(width, height, title, description, marks);
+    }
+
+    private static double opacity(Ground ground) {
+        return ground.contoured() ? VEILED : 1;
+    }
+}

@@ -1,0 +1,90 @@
+package org.seepledger.picture;
+
+import java.util.stream.DoubleStream;
+
+/**
+ * Which colour a value has.
+ *
+ * @param ramp the colours
+ * @param from the value at the ramp's beginning
+ * @param to the value at its end, beyond {@code from}
+ */
+public record ValueScale(Ramp ramp, double from, double to) {
+
+    private static final double SHOWN = 0.98;
+
+    /** Refuses an empty range. */
+    public ValueScale {
+        if (!(to > from)) {
+            throw new IllegalArgumentException("no range from " + from + " to " + to);
+        }
+    }
+
+    /**
+     * {@return a scale from the least to the greatest of some values; a narrow one about a single value, and 0 to 1 about
+     * none}
+     *
+     * @param values the values; those that are not finite do not count
+     */
+    public static ValueScale over(double[] values) {
+        double least = finite(values).min().orElse(0);
+        double greatest = finite(values).max().orElse(1);
+        double room = greatest > least ? 0 : Math.max(1e-3, 1e-3 * Math.abs(least));
+        return new ValueScale(Ramp.DEPTH, least - room, greatest + room);
+    }
+
+    /**
+     * {@return a scale that has 0 in its middle and ends at the size that only one in fifty values exceeds, so that a few
+     * extremes do not bleach the rest}
+     *
+     * @param values the values; those that are not finite do not count
+     */
+    public static ValueScale aboutZero(double[] values) {
+        double[] sizes = finite(values).map(Math::abs).sorted().toArray();
+        double most = sizes.length == 0 ? 0 : sizes[(int) (SHOWN * (sizes.length - 1))];
+        double end = most > 0 ? most : sizes.length > 0 && sizes[sizes.length - 1] > 0 ? sizes[sizes.length - 1] : 1;
+        return new ValueScale(Ramp.SWING, -end, end);
+    }
+
+    private static DoubleStream finite(double[] values) {
+        return DoubleStream.of(values).filter(Double::isFinite);
+    }
+
+    /**
+     * {@return the colour of a value: alpha, red, green and blue, eight bits each; nothing for one that is not finite}
+     *
+     * @param value the value
+     * @param opacity from 0 to 1
+     */
+    public int argb(double value, double opacity) {
+        int alpha = (int) Math.round(255 * opacity);
+        return Double.isFinite(value) ? alpha << 24 | ramp.rgb(share(value)) : 0;
+    }
+
+    /**
+     * {@return where along the ramp a value lies, 0 at its beginning and 1 at its end}
+     *
+     * @param value the value
+     */
+    public double share(double value) {
+        return (value - from) / (to - from);
+    }
+
+    /**
+     * {@return the value at a place along the ramp}
+     *
+     * @param share 0 at its beginning and 1 at its end
+     */
+    public double at(double share) {
+        return from + share * (to - from);
+    }
+
+    /**
+     * {@return round values in the range}
+     *
+     * @param most how many there may be, at least 2
+     */
+    public Ticks ticks(int most) {
+        return Ticks.within(from, to, most);
+    }
+}
