@@ -173,7 +173,8 @@ class FolioTest {
                 .tryQuery()
                 .isPresent());
         draw(List.of(), true);
-        Button begin = window.robot.from(window.robot.lookup("#ledger").<Node>query())
+        Button begin = window.robot
+                .from(window.robot.lookup("#ledger").<Node>query())
                 .lookup("Draw a prism")
                 .queryButton();
         window.await(begin::isVisible);

@@ -34,7 +34,9 @@ class LiveBudgetTest {
     void open() {
         Opening opening = Opening.of(Path.of("sample-aquifers/valley"));
         set = opening.set();
-        prisms = set.workbench().read(Path.of("sample-aquifers/valley/prisms.geojson")).prisms();
+        prisms = set.workbench()
+                .read(Path.of("sample-aquifers/valley/prisms.geojson"))
+                .prisms();
     }
 
     @AfterEach

@@ -28,7 +28,14 @@ class MapModelTest {
         assertThat(model.values().state().get().phase()).isEqualTo(PaneState.Phase.EMPTY);
         opening = Opening.of(Path.of("sample-aquifers/valley"));
         session.show(Optional.of(opening.set()));
-        session.drawing().set(new Drawing(1, opening.set().workbench().read(Path.of("sample-aquifers/valley/prisms.geojson")).prisms(), true));
+        session.drawing()
+                .set(new Drawing(
+                        1,
+                        opening.set()
+                                .workbench()
+                                .read(Path.of("sample-aquifers/valley/prisms.geojson"))
+                                .prisms(),
+                        true));
     }
 
     @AfterEach
