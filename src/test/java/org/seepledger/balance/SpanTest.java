@@ -42,8 +42,7 @@ class SpanTest {
 
     private static Balance balance(Aquifer aquifer, Span span) {
         KeptCells kept = new KeptCells(aquifer, 1L << 28);
-        return WaterBalance.of(
-                aquifer, kept::around, span, List.of(LEFT, RIGHT), WellRule.POINT, 1, Progress.NONE);
+        return WaterBalance.of(aquifer, kept::around, span, List.of(LEFT, RIGHT), WellRule.POINT, 1, Progress.NONE);
     }
 
     @Test
@@ -83,7 +82,8 @@ class SpanTest {
         Balance second = balance(aquifer, Span.only(1));
         Balance third = balance(aquifer, Span.only(2));
         Balance both = balance(aquifer, new Span(1, 3));
-        double mean = (2 * second.imbalance().at(0, 10, 10) + 4 * third.imbalance().at(0, 10, 10)) / 6;
+        double mean =
+                (2 * second.imbalance().at(0, 10, 10) + 4 * third.imbalance().at(0, 10, 10)) / 6;
         assertThat(both.imbalance().at(0, 10, 10)).isCloseTo(mean, org.assertj.core.api.Assertions.within(1e-15));
         assertThat(mean).isNotZero();
     }

@@ -81,7 +81,11 @@ class FolioTest {
     }
 
     private boolean isShown(String selector) {
-        return window.robot.lookup(selector).match(node -> node.isVisible()).tryQuery().isPresent();
+        return window.robot
+                .lookup(selector)
+                .match(node -> node.isVisible())
+                .tryQuery()
+                .isPresent();
     }
 
     private <T> void choose(String selector, T value) {
@@ -163,12 +167,14 @@ class FolioTest {
     void whatCannotBeBalancedIsSaidInThePaneAndTheWindowLivesOn() {
         openSet(VALLEY);
         draw(List.of(moved(session().selectedPrism().orElseThrow(), 1e6)), true);
-        window.await(() -> window.robot.lookup(".sl-notice-words")
+        window.await(() -> window.robot
+                .lookup(".sl-notice-words")
                 .match((Label label) -> label.isVisible() && label.getText().contains("outside the grid"))
                 .tryQuery()
                 .isPresent());
         draw(List.of(), true);
-        Button begin = window.robot.from(window.robot.lookup("#ledger").<Node>query())
+        Button begin = window.robot
+                .from(window.robot.lookup("#ledger").<Node>query())
                 .lookup("Draw a prism")
                 .queryButton();
         window.await(begin::isVisible);
@@ -252,13 +258,14 @@ class FolioTest {
     private static String ring(Ring ring) {
         List<Side> sides = new ArrayList<>(ring.sides());
         sides.add(sides.get(0));
-        return sides.stream().map(side -> "[" + side.x() + "," + side.y() + "]").collect(Collectors.joining(",", "[", "]"));
+        return sides.stream()
+                .map(side -> "[" + side.x() + "," + side.y() + "]")
+                .collect(Collectors.joining(",", "[", "]"));
     }
 
     private void draw(List<Prism> prisms, boolean settled) {
-        window.robot.interact(() -> session()
-                .drawing()
-                .set(new Drawing(session().drawing().get().revision() + 1, prisms, settled)));
+        window.robot.interact(() ->
+                session().drawing().set(new Drawing(session().drawing().get().revision() + 1, prisms, settled)));
     }
 
     private static Prism moved(Prism prism, double distance) {

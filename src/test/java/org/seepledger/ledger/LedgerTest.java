@@ -155,8 +155,10 @@ class LedgerTest {
                         new Line(Group.SIDE, "", 0, 4, 6),
                         new Line(Group.SIDE, "", 1, 5, 6),
                         new Line(Group.STORAGE, "", 0, 7, 8));
-        assertThat(Line.each(entries)).hasSize(5).element(3).satisfies(line -> assertThat(line.net())
-                .isNaN());
+        assertThat(Line.each(entries))
+                .hasSize(5)
+                .element(3)
+                .satisfies(line -> assertThat(line.net()).isNaN());
     }
 
     @Test

@@ -132,7 +132,8 @@ public final class LiveBudget {
                 || known.get().hasNow(question.prism, question.interval)) {
             now.set(PaneState.READY);
         } else if (asked.isEmpty()) {
-            now.set(PaneState.working(working(known.get().now().isPresent() || known.get().record().isPresent())));
+            now.set(PaneState.working(working(
+                    known.get().now().isPresent() || known.get().record().isPresent())));
             ask(question);
         }
     }

@@ -58,7 +58,9 @@ public final class DraftModel {
         if (!current.equals(kept)) {
             history.step(Words.of("step.restore"), current);
         }
-        current.shapes().stream().findFirst().ifPresent(shape -> session.selected().set(shape.name()));
+        current.shapes().stream()
+                .findFirst()
+                .ifPresent(shape -> session.selected().set(shape.name()));
         publish(true);
     }
 
@@ -74,7 +76,8 @@ public final class DraftModel {
     }
 
     private void publish(boolean settled) {
-        int layers = session.set().get().map(set -> set.aquifer().layers().size()).orElse(1);
+        int layers =
+                session.set().get().map(set -> set.aquifer().layers().size()).orElse(1);
         session.drawing()
                 .set(new org.seepledger.desktop.session.Drawing(
                         session.drawing().get().revision() + 1,

@@ -85,11 +85,17 @@ public final class ExchangeModel {
      * @param width in logical pixels
      */
     public Optional<Picture> diagram(double width) {
-        return session.set().get().flatMap(set -> live.whole().get().map(record -> {
-            Period period = reading.period(set, session.interval().get());
-            return ExchangeDiagram.of(
-                    names(record), record.balance().exchange(), period, reading.shown(set), Math.max(320, width));
-        }));
+        return session.set()
+                .get()
+                .flatMap(set -> live.whole().get().map(record -> {
+                    Period period = reading.period(set, session.interval().get());
+                    return ExchangeDiagram.of(
+                            names(record),
+                            record.balance().exchange(),
+                            period,
+                            reading.shown(set),
+                            Math.max(320, width));
+                }));
     }
 
     /** Copies the matrix with its unit, in full precision. */

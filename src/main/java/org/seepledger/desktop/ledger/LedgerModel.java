@@ -164,7 +164,10 @@ public final class LedgerModel {
         Optional<Prism> prism = session.selectedPrism();
         if (set.isPresent() && prism.isPresent()) {
             Period period = reading.period(set.get(), session.interval().get());
-            live.known().get().budget(prism.get(), period).ifPresentOrElse(shown -> show(set.get(), shown), this::clear);
+            live.known()
+                    .get()
+                    .budget(prism.get(), period)
+                    .ifPresentOrElse(shown -> show(set.get(), shown), this::clear);
         } else {
             clear();
         }

@@ -44,7 +44,8 @@ class LedgerModelTest {
                 .get()
                 .budget(
                         valley.prisms.get(0),
-                        valley.reading.period(valley.set, valley.session.interval().get()))
+                        valley.reading.period(
+                                valley.set, valley.session.interval().get()))
                 .orElseThrow()
                 .budget();
     }
@@ -55,7 +56,8 @@ class LedgerModelTest {
         assertThat(labels(Kind.ENTRY)).startsWith("far bank", "side 3").contains("top", "recharge", "elastic storage");
         assertThat(labels(Kind.TOTAL)).containsExactly("inflow", "outflow", "storage change", "residual");
         assertThat(labels(Kind.PERCENTAGE)).containsExactly("closure error", "net closure error");
-        assertThat(model.belongs().get()).isEqualTo("well field, layers 1 to 3, 503\u202f700 m² · interval 1, 2021-10-01 to 2021-11-01");
+        assertThat(model.belongs().get())
+                .isEqualTo("well field, layers 1 to 3, 503\u202f700 m² · interval 1, 2021-10-01 to 2021-11-01");
     }
 
     @Test
