@@ -34,7 +34,7 @@ class LiveBudgetTest {
     void open() {
         Opening opening = Opening.of(Path.of("sample-aquifers/valley"));
         set = opening.set();
-        prisms = opening.prisms();
+        prisms = set.workbench().read(set.path().resolve(Opening.PRISMS)).prisms();
     }
 
     @AfterEach
