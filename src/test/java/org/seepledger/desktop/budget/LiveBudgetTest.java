@@ -34,9 +34,7 @@ class LiveBudgetTest {
     void open() {
         Opening opening = Opening.of(Path.of("sample-aquifers/valley"));
         set = opening.set();
-        prisms = set.workbench()
-                .read(Path.of("sample-aquifers/valley/prisms.geojson"))
-                .prisms();
+        prisms = set.workbench().read(set.path().resolve(Opening.PRISMS)).prisms();
     }
 
     @AfterEach
@@ -66,8 +64,7 @@ class LiveBudgetTest {
                                 .toList()))
                 .toList();
         Prism moved = new Prism(first.name(), rings, first.range());
-        return java.util.stream.Stream.concat(
-                        java.util.stream.Stream.of(moved), prisms.stream().skip(1))
+        return java.util.stream.Stream.concat(java.util.stream.Stream.of(moved), prisms.stream().skip(1))
                 .toList();
     }
 
@@ -185,8 +182,7 @@ class LiveBudgetTest {
         assertThat(flows.net()).containsKeys("far bank", "side 3").doesNotContainKeys("top", "recharge");
         assertThat(flows.revision()).isEqualTo(session.drawing().get().revision());
         draw(moved(40), false);
-        assertThat(session.faceFlows().get().revision())
-                .isNotEqualTo(session.drawing().get().revision());
+        assertThat(session.faceFlows().get().revision()).isNotEqualTo(session.drawing().get().revision());
     }
 
     @Test
