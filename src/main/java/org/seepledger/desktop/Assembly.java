@@ -54,7 +54,8 @@ final class Assembly {
     Assembly(Outside outside, List<Path> samplePlaces) {
         this.outside = outside;
         this.map = new MapModel(session, outside.tasks());
-        this.welcome = new WelcomeModel(outside.tasks(), outside.dialogs(), outside.folders(), this::show, go -> files().whenSafe(go));
+        this.welcome = new WelcomeModel(
+                outside.tasks(), outside.dialogs(), outside.folders(), this::show, go -> files().whenSafe(go));
         Actions actions = new Actions();
         this.draft = new DraftModel(session);
         this.hand = new DraftHand(draft);

@@ -17,10 +17,10 @@ import org.seepledger.balance.Span;
 import org.seepledger.balance.WaterBalance;
 import org.seepledger.balance.WellRule;
 import org.seepledger.fault.UsageFault;
+import org.seepledger.io.DataFolder;
 import org.seepledger.io.aquifer.AquiferFolder;
 import org.seepledger.io.aquifer.AquiferReader;
 import org.seepledger.io.crs.PlanCrs;
-import org.seepledger.io.DataFolder;
 import org.seepledger.io.prisms.DrawingReader;
 import org.seepledger.io.prisms.DrawingWriter;
 import org.seepledger.io.prisms.PrismsReader;
@@ -168,15 +168,14 @@ public final class Workbench implements AutoCloseable {
      * @throws UsageFault if it cannot be written
      */
     public void write(Path file, Drawing drawing) {
-        Optional<String> named = crs().isLocal()
-                ? Optional.empty()
-                : crs().code().or(() -> Optional.of(crs().wkt()));
+        Optional<String> named =
+                crs().isLocal() ? Optional.empty() : crs().code().or(() -> Optional.of(crs().wkt()));
         DrawingWriter.write(file, named, drawing);
     }
 
     private PrismsReader reader(Consumer<String> notes) {
         int layers = aquifer().layers().size();
-        return new PrismsReader(folder.crs(), aquifer().grid(), layers, true, surfaces, notes);
+        return new PrismsReader(folder.crs(), aquifer().grid(), layers, true, surfaces, notes, notes);
     }
 
     /**

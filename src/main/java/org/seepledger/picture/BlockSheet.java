@@ -107,7 +107,8 @@ final class BlockSheet {
     }
 
     private void guide(double from, double to, double level) {
-        guides.add(line(from, y(level), to, y(level), Stroke.of(Ink.Token.MUTED, 0.8).dashed(3.0, 3.0)));
+        guides.add(line(
+                from, y(level), to, y(level), Stroke.of(Ink.Token.MUTED, 0.8).dashed(3.0, 3.0)));
     }
 
     private static Mark.Line line(double fromX, double fromY, double toX, double toY, Stroke stroke) {
@@ -132,8 +133,7 @@ final class BlockSheet {
     private void outline(double x, double wide, double one, double other) {
         if (Math.abs(one - other) >= VISIBLE) {
             Box box = new Box(x, Math.min(one, other), wide, Math.abs(one - other));
-            marks.add(new Mark.Area(
-                    List.of(box.ring()), Optional.empty(), Optional.of(Stroke.of(Ink.Token.TEXT, 1))));
+            marks.add(new Mark.Area(List.of(box.ring()), Optional.empty(), Optional.of(Stroke.of(Ink.Token.TEXT, 1))));
         }
     }
 
@@ -170,6 +170,9 @@ final class BlockSheet {
 
     /** Marks where a leader begins that passes over another piece. */
     private double dot(Drawn one) {
+        if (Math.abs(y(one.piece().from()) - y(one.piece().to())) < 8) {
+            return one.x() + 1;
+        }
         double x = one.x() - 6;
         Box dot = new Box(x - 2, one.y() - 2, 4, 4);
         marks.add(Mark.Area.of(dot, Fill.of(Ink.Token.TEXT)));
@@ -200,8 +203,7 @@ final class BlockSheet {
         list.add(Mark.Text.of(right, listEnd, piece.share(), NAME, Anchor.END).in(Ink.Token.MUTED));
         list.add(Mark.Text.of(right - 54, listEnd, piece.figure(), NAME, Anchor.END));
         double room = right - 60 - Lettering.width(piece.figure(), NAME) - MARGIN - 26;
-        list.add(Mark.Text.of(
-                MARGIN + 26, listEnd, Lettering.fitted(piece.name(), NAME, room), NAME, Anchor.START));
+        list.add(Mark.Text.of(MARGIN + 26, listEnd, Lettering.fitted(piece.name(), NAME, room), NAME, Anchor.START));
     }
 
     /** Adds a paragraph below all else. */

@@ -121,7 +121,8 @@ public final class BudgetBlocks {
         }
         return sides + " + change in storage " + Figures.typeset(storage) + " + residual " + Figures.typeset(residual)
                 + ", in " + unit.words() + "; heights are to scale."
-                + (flows == Flows.NET ? " Of each item the net flow is shown." : "") + " Within the period storage gave "
+                + (flows == Flows.NET ? " Of each item the net flow is shown." : "")
+                + " Within the period storage gave "
                 + Figures.typeset(stored(Entry::inflow)) + " and took " + Figures.typeset(stored(Entry::outflow)) + ".";
     }
 

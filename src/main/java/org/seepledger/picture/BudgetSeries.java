@@ -179,7 +179,7 @@ public final class BudgetSeries {
     private String aboutResidual() {
         String name = values.storageKnown() ? "residual" : "gains − losses";
         return values.closes()
-                ? name + ": rounding alone, at most " + Figures.typeset(values.largestResidual()) + " " + unit.words()
+                ? name + ": rounding alone, at most " + Figures.typeset(values.largestResidual())
                 : name + ", on a scale of its own";
     }
 

@@ -21,6 +21,9 @@ final class ExchangeSheet {
     private static final double PAD = 5;
     private static final double TOP = 24;
     private static final double HEAD = 8;
+    /** Bold letters are wider than others. */
+    private static final double BOLD = 0.9;
+
     private static final double HAIRLINE = 1.2;
     private static final int CORNER = 16;
     private static final Stroke UNKNOWN = Stroke.of(Ink.Token.TEXT, 1.4).dashed(4.0, 3.0);
@@ -88,7 +91,7 @@ final class ExchangeSheet {
         for (Flow flow : inOrder(flows, row)) {
             right = attach(flow, row, right) + PAD;
         }
-        Paragraph words = new Paragraph(name, NAME, nodeRight - nodeLeft - 14);
+        Paragraph words = new Paragraph(name, NAME, BOLD * (nodeRight - nodeLeft - 14));
         double end = Math.max(Math.max(left, right), y + words.height() + 2 * PAD);
         Box box = new Box(nodeLeft, y, nodeRight - nodeLeft, end - y);
         marks.add(new Mark.Area(

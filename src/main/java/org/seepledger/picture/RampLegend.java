@@ -29,23 +29,23 @@ public final class RampLegend {
      * {@return a legend that lies level}
      *
      * @param scale which colour a value has
+     * @param opacity of the colours, from 0 to 1
      * @param words what the values are, with their unit
      * @param place where it goes; its height is {@link #LEVEL_HEIGHT}, its width at least 80
      */
-    public static List<Mark> level(ValueScale scale, String words, Box place) {
+    public static List<Mark> level(ValueScale scale, double opacity, String words, Box place) {
         RampLegend legend = new RampLegend(scale);
         Box strip = new Box(place.x(), place.y() + 17, place.width(), STRIP);
         legend.marks.add(title(words, place));
-        legend.strip(strip, new double[] {strip.width() / COLOURS, 0, 0, STRIP, strip.x(), strip.y()}, false);
-        Labels labels = new Labels(new Box(place.x() - 1, strip.bottom(), place.width() + 2, 30));
+        legend.strip(strip, new double[] {strip.width() / COLOURS, 0, 0, STRIP, strip.x(), strip.y()}, false, opacity);
+        Labels labels = new Labels(new Box(place.x() - 2, strip.bottom() - 2, place.width() + 4, 34));
         Ticks ticks = levelTicks(scale, place.width());
         for (int i = 0; i < ticks.count(); i++) {
             double x = strip.x() + scale.share(ticks.values().get(i)) * strip.width();
             double half = Lettering.width(ticks.label(i), SIZE) / 2;
             double middle = Math.max(place.x() + half, Math.min(place.right() - half, x));
             double base = strip.bottom() + TICK + SIZE;
-            if (labels.place(
-                    List.of(Mark.Text.of(middle, base, ticks.label(i), SIZE, Anchor.MIDDLE)), legend.marks)) {
+            if (labels.place(List.of(Mark.Text.of(middle, base, ticks.label(i), SIZE, Anchor.MIDDLE)), legend.marks)) {
                 legend.tick(x, strip.bottom(), x, strip.bottom() + TICK);
             }
         }
@@ -63,7 +63,7 @@ public final class RampLegend {
         RampLegend legend = new RampLegend(scale);
         Box strip = new Box(place.x(), place.y() + 20, STRIP, place.height() - ENDS);
         legend.marks.add(title(words, place));
-        legend.strip(strip, new double[] {STRIP, 0, 0, strip.height() / COLOURS, strip.x(), strip.y()}, true);
+        legend.strip(strip, new double[] {STRIP, 0, 0, strip.height() / COLOURS, strip.x(), strip.y()}, true, 1);
         Ticks ticks = uprightTicks(scale, strip.height());
         for (int i = 0; i < ticks.count(); i++) {
             double y = strip.bottom() - scale.share(ticks.values().get(i)) * strip.height();
@@ -112,15 +112,14 @@ public final class RampLegend {
                 place.x(), place.y() + 11, Lettering.fitted(words, SIZE, place.width()), SIZE, Anchor.START);
     }
 
-    private void strip(Box strip, double[] placement, boolean upright) {
+    private void strip(Box strip, double[] placement, boolean upright, double opacity) {
         int[] colours = new int[COLOURS];
         for (int i = 0; i < COLOURS; i++) {
             double share = (i + 0.5) / COLOURS;
-            colours[i] = 0xff000000 | scale.ramp().rgb(upright ? 1 - share : share);
+            colours[i] = scale.argb(scale.at(upright ? 1 - share : share), opacity);
         }
         marks.add(new Mark.Image(upright ? 1 : COLOURS, upright ? COLOURS : 1, colours, placement));
-        marks.add(new Mark.Area(
-                List.of(strip.ring()), Optional.empty(), Optional.of(Stroke.of(Ink.Token.MUTED, 1))));
+        marks.add(new Mark.Area(List.of(strip.ring()), Optional.empty(), Optional.of(Stroke.of(Ink.Token.MUTED, 1))));
     }
 
     private void tick(double fromX, double fromY, double toX, double toY) {

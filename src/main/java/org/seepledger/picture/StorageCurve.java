@@ -70,8 +70,7 @@ public final class StorageCurve {
 
     private Picture picture(String prism, Times times) {
         List<Mark> marks = new ArrayList<>();
-        double[] range =
-                DoubleStream.concat(values(storage), values(residual)).toArray();
+        double[] range = DoubleStream.concat(values(storage), values(residual)).toArray();
         double least = DoubleStream.of(range).min().orElse(0);
         double greatest = DoubleStream.of(range).max().orElse(0);
         double high = width >= 600 ? 190 : 160;
@@ -153,8 +152,7 @@ public final class StorageCurve {
                         + " periods, since no number can be given for the next."
                 : "";
         if (!storageKnown) {
-            return "Storage is not known; gains − losses, " + last(residual) + "."
-                    + covered;
+            return "Storage is not known; gains − losses, " + last(residual) + "." + covered;
         }
         return "Storage has taken, " + last(storage) + "; in between, from "
                 + Figures.typeset(values(storage).min().orElse(0)) + " to "

@@ -71,6 +71,15 @@ public record ValueScale(Ramp ramp, double from, double to) {
     }
 
     /**
+     * {@return the value at a place along the ramp}
+     *
+     * @param share 0 at its beginning and 1 at its end
+     */
+    public double at(double share) {
+        return from + share * (to - from);
+    }
+
+    /**
      * {@return round values in the range}
      *
      * @param most how many there may be, at least 2

@@ -12,6 +12,10 @@ public final class Figures {
 
     private static final double SMALL = 1e-4;
     private static final double LARGE = 1e12;
+
+    /** Sums of some thousand terms in double precision are as exact as this. */
+    private static final double ROUNDING = 1e-12;
+
     private static final int DIGITS = 4;
     private static final Pattern POWER_OF_TEN = Pattern.compile("e([+-]\\d+)");
     private static final String RAISED = "⁰¹²³⁴⁵⁶⁷⁸⁹";
@@ -37,6 +41,16 @@ public final class Figures {
         BigDecimal rounded = new BigDecimal(value).round(new MathContext(DIGITS));
         int decimals = Math.max(0, rounded.scale());
         return String.format(Locale.ROOT, "%,." + decimals + "f", rounded).replace(',', ' ');
+    }
+
+    /**
+     * {@return a number as {@link #shown(double)}, but 0 where it is nothing but rounding}
+     *
+     * @param value the number
+     * @param scale the magnitude of the numbers that it was reckoned from
+     */
+    public static String shown(double value, double scale) {
+        return shown(Math.abs(value) < ROUNDING * scale ? 0 : value);
     }
 
     /**

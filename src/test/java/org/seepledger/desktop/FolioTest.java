@@ -10,6 +10,8 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Collectors;
+import javafx.scene.Node;
+import javafx.scene.control.Button;
 import javafx.scene.control.ChoiceBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.TableView;
@@ -20,6 +22,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.seepledger.balance.Periods;
 import org.seepledger.balance.WellRule;
+import org.seepledger.desktop.draw.Tool;
 import org.seepledger.desktop.ledger.LedgerRow;
 import org.seepledger.desktop.map.Camera;
 import org.seepledger.desktop.session.Drawing;
@@ -78,7 +81,11 @@ class FolioTest {
     }
 
     private boolean isShown(String selector) {
-        return window.robot.lookup(selector).match(node -> node.isVisible()).tryQuery().isPresent();
+        return window.robot
+                .lookup(selector)
+                .match(node -> node.isVisible())
+                .tryQuery()
+                .isPresent();
     }
 
     private <T> void choose(String selector, T value) {
@@ -98,6 +105,7 @@ class FolioTest {
         openSet(VALLEY);
         window.robot.clickOn("#sort-largest-out");
         window.await(() -> labels().get(1).equals("side 3"));
+        window.settle();
         window.robot.clickOn("side 4");
         assertThat(session().lit().get()).isEqualTo("side 4");
         window.robot.interact(() -> session().lit().set("pit edge"));
@@ -159,12 +167,19 @@ class FolioTest {
     void whatCannotBeBalancedIsSaidInThePaneAndTheWindowLivesOn() {
         openSet(VALLEY);
         draw(List.of(moved(session().selectedPrism().orElseThrow(), 1e6)), true);
-        window.await(() -> window.robot.lookup(".sl-notice-words")
+        window.await(() -> window.robot
+                .lookup(".sl-notice-words")
                 .match((Label label) -> label.isVisible() && label.getText().contains("outside the grid"))
                 .tryQuery()
                 .isPresent());
         draw(List.of(), true);
-        window.await(() -> window.robot.lookup("Draw a prism").tryQuery().isPresent());
+        Button begin = window.robot
+                .from(window.robot.lookup("#ledger").<Node>query())
+                .lookup("Draw a prism")
+                .queryButton();
+        window.await(begin::isVisible);
+        window.robot.clickOn(begin);
+        assertThat(window.assembly().draft().tool().get()).isEqualTo(Tool.POLYGON);
     }
 
     @Test
@@ -243,13 +258,14 @@ class FolioTest {
     private static String ring(Ring ring) {
         List<Side> sides = new ArrayList<>(ring.sides());
         sides.add(sides.get(0));
-        return sides.stream().map(side -> "[" + side.x() + "," + side.y() + "]").collect(Collectors.joining(",", "[", "]"));
+        return sides.stream()
+                .map(side -> "[" + side.x() + "," + side.y() + "]")
+                .collect(Collectors.joining(",", "[", "]"));
     }
 
     private void draw(List<Prism> prisms, boolean settled) {
-        window.robot.interact(() -> session()
-                .drawing()
-                .set(new Drawing(session().drawing().get().revision() + 1, prisms, settled)));
+        window.robot.interact(() ->
+                session().drawing().set(new Drawing(session().drawing().get().revision() + 1, prisms, settled)));
     }
 
     private static Prism moved(Prism prism, double distance) {

@@ -106,7 +106,8 @@ class MapWindowTest {
         window.robot.moveTo(onScreen(3, 3));
         window.await(() -> value.getText().isEmpty());
         assertThat(value.getLayoutX()).isEqualTo(left);
-        assertThat(window.robot.lookup("#readout-cell").queryAs(Label.class).getText()).isEqualTo("off the grid");
+        assertThat(window.robot.lookup("#readout-cell").queryAs(Label.class).getText())
+                .isEqualTo("off the grid");
     }
 
     @Test
@@ -120,9 +121,11 @@ class MapWindowTest {
         window.robot.doubleClickOn(from).press(KeyCode.SHORTCUT, KeyCode.A).release(KeyCode.A, KeyCode.SHORTCUT);
         window.robot.write("90");
         window.robot.press(KeyCode.ENTER).release(KeyCode.ENTER);
-        assertThat(window.assembly().map().values().scale().get().map(ValueScale::from)).isEqualTo(Optional.of(90.0));
+        assertThat(window.assembly().map().values().scale().get().map(ValueScale::from))
+                .isEqualTo(Optional.of(90.0));
         window.robot.clickOn("#range-fit");
-        assertThat(window.assembly().map().values().scale().get().orElseThrow().from()).isGreaterThan(91);
+        assertThat(window.assembly().map().values().scale().get().orElseThrow().from())
+                .isGreaterThan(91);
     }
 
     @Test

@@ -31,6 +31,10 @@ public final class Screenshots {
                 window.settle();
                 window.settle();
                 both(window, folder, "map", suffix);
+                for (String page : new String[] {"answers", "exchange", "ledger"}) {
+                    window.robot.clickOn("#folio-" + page);
+                    both(window, folder, page, suffix);
+                }
                 window.robot.interact(() -> {
                     window.assembly().map().showPrism();
                     window.assembly().tray().flipCard();

@@ -58,8 +58,8 @@ class LayerReadingTest {
 
     @Test
     void headIsThatAtTheIntervalsEndAndADryCellHasNone() {
-        FormulaValues head = new FormulaValues(
-                GRID, 3, (step, layer, x, y) -> x > 1100 ? Double.NEGATIVE_INFINITY : 5 + step);
+        FormulaValues head =
+                new FormulaValues(GRID, 3, (step, layer, x, y) -> x > 1100 ? Double.NEGATIVE_INFINITY : 5 + step);
         Aquifer aquifer = AquiferDraft.on(GRID).times(0, 1, 2).head(head).done();
         GridLayer read = read(aquifer, Kind.HEAD, 0, 1, 1);
         assertThat(read.rows()).isEqualTo(5);
@@ -107,8 +107,7 @@ class LayerReadingTest {
     void arrowsPointAlongTheMap() {
         Grid turned = new Grid(Axis.even(0, 1, 4), Axis.even(0, 1, 4), 30, 1);
         Window all = turned.window();
-        Aquifer alongGrid =
-                AquiferDraft.on(turned).flow(flux(2, 0, 0, false)).done();
+        Aquifer alongGrid = AquiferDraft.on(turned).flow(flux(2, 0, 0, false)).done();
         FluxField arrows = new LayerReading(alongGrid, Progress.NONE).flux(0, 0, all, 2);
         assertThat(arrows.east().values()).hasSize(4);
         assertThat(arrows.east().at(1, 1)).isCloseTo(Math.sqrt(3), ROUNDING);
@@ -135,9 +134,7 @@ class LayerReadingTest {
         assertThat(quantities)
                 .extracting(MapQuantity::label)
                 .containsExactly("flux magnitude", "rain", "ditch", "thickness", "saturated thickness", "imbalance");
-        assertThat(quantities)
-                .extracting(MapQuantity::unit)
-                .containsExactly("m/d", "m/d", "m/d", "m", "m", "m3/d");
+        assertThat(quantities).extracting(MapQuantity::unit).containsExactly("m/d", "m/d", "m/d", "m", "m", "m3/d");
     }
 
     @Test
@@ -148,8 +145,7 @@ class LayerReadingTest {
         GridLayer read = read(aquifer, Kind.IMBALANCE, 0, 0, 1);
         assertThat(read.at(1, 2)).isEqualTo(-7);
         assertThat(read.at(1, 3)).isZero();
-        assertThat(WellPlace.of(aquifer, 0))
-                .containsExactly(new WellPlace("w", "pumping", 1050, 535, "layer 1", -7));
+        assertThat(WellPlace.of(aquifer, 0)).containsExactly(new WellPlace("w", "pumping", 1050, 535, "layer 1", -7));
     }
 
     @Test

@@ -37,7 +37,10 @@ class BudgetBlocksTest {
 
     @Property(tries = 60)
     void nothingIsCutOrCovered(
-            @ForAll long seed, @ForAll boolean known, @ForAll Flows flows, @ForAll @IntRange(min = 0, max = 30) int items) {
+            @ForAll long seed,
+            @ForAll boolean known,
+            @ForAll Flows flows,
+            @ForAll @IntRange(min = 0, max = 30) int items) {
         RandomLedger random = new RandomLedger(seed, 1);
         PeriodBudget budget =
                 random.ledger(known, items).budget(random.periods().get(0));
@@ -62,7 +65,10 @@ class BudgetBlocksTest {
     @Test
     void storageAndResidualCloseTheGapWhateverTheirSigns() {
         double[][][] budgets = {
-            {{10, 90, 0}, {40, 0, 20}}, {{10, 90, 0}, {40, 0, 120}}, {{10, 30, 60}, {80, 0, 0}}, {{10, 30, 20}, {80, 0, 0}}
+            {{10, 90, 0}, {40, 0, 20}},
+            {{10, 90, 0}, {40, 0, 120}},
+            {{10, 30, 60}, {80, 0, 0}},
+            {{10, 30, 20}, {80, 0, 0}}
         };
         for (double[][] budget : budgets) {
             Picture picture = few(budget[0], budget[1], Flows.GROSS);
@@ -120,7 +126,8 @@ class BudgetBlocksTest {
         assertThat(Drawn.filled(picture, Ink.Token.STORAGE)).isEmpty();
         assertThat(Drawn.filled(picture, Ink.Token.RESIDUAL)).isEmpty();
         assertThat(Drawn.of(Mark.Area.class, picture.marks()))
-                .filteredOn(area -> area.stroke().filter(line -> !line.dash().isEmpty()).isPresent())
+                .filteredOn(area ->
+                        area.stroke().filter(line -> !line.dash().isEmpty()).isPresent())
                 .singleElement()
                 .satisfies(open -> assertThat(Drawn.box(open).height() / high(picture, Ink.Token.GAIN))
                         .isCloseTo(0.6, within(1e-9)));
@@ -141,8 +148,8 @@ class BudgetBlocksTest {
         Picture picture = few(new double[3], new double[3], Flows.GROSS);
         assertThat(picture.description()).startsWith("Gains 0 = losses 0 + change in storage 0 + residual 0");
         Drawn.isLegible(picture);
-        PeriodBudget none = RandomLedger.day(
-                true, FEW, new double[] {Double.NaN, Double.NaN, Double.NaN}, new double[] {0, 0, 0});
+        PeriodBudget none =
+                RandomLedger.day(true, FEW, new double[] {Double.NaN, Double.NaN, Double.NaN}, new double[] {0, 0, 0});
         Drawn.isLegible(BudgetBlocks.of("p", none, Flows.NET, RandomLedger.RATE, 360));
     }
 

@@ -28,8 +28,7 @@ final class Drawn {
     /** The filled areas of an ink, as the boxes round them; swatches of a key left out. */
     static List<Box> filled(Picture picture, Ink.Token ink) {
         return of(Mark.Area.class, picture.marks()).stream()
-                .filter(area ->
-                        area.fill().map(fill -> fill.ink() == ink).orElse(false))
+                .filter(area -> area.fill().map(fill -> fill.ink() == ink).orElse(false))
                 .map(Drawn::box)
                 .filter(box -> !(Math.abs(box.width() - 16) < ROUNDING && Math.abs(box.height() - 11) < ROUNDING))
                 .toList();

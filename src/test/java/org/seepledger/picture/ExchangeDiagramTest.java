@@ -83,8 +83,7 @@ class ExchangeDiagramTest {
         double thick = Math.abs(ring[1] - ring[ring.length - 1]);
         for (int i = 1; i < 30; i++) {
             int other = ring.length / 2 - 1 - i;
-            assertThat(Math.hypot(
-                            ring[2 * i] - ring[2 * other], ring[2 * i + 1] - ring[2 * other + 1]))
+            assertThat(Math.hypot(ring[2 * i] - ring[2 * other], ring[2 * i + 1] - ring[2 * other + 1]))
                     .isCloseTo(thick, within(1e-6));
         }
     }
@@ -92,7 +91,9 @@ class ExchangeDiagramTest {
     @Test
     void whatCannotBeGivenIsDashedWithADash() {
         Picture picture = diagram(
-                NAMES.subList(0, 2), List.of(flow("north", "well field", Double.NaN), flow("outside", "north", 3)), 760);
+                NAMES.subList(0, 2),
+                List.of(flow("north", "well field", Double.NaN), flow("outside", "north", 3)),
+                760);
         assertThat(Drawn.of(Mark.Line.class, picture.marks()))
                 .filteredOn(line -> !line.stroke().dash().isEmpty())
                 .hasSize(1);

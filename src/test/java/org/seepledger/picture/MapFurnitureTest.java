@@ -24,10 +24,11 @@ class MapFurnitureTest {
         assertThat(bar.length()).isLessThanOrEqualTo(120 * (1 + 1e-9)).isGreaterThan(120 / 2.6);
         assertThat(metres * scale).isCloseTo(bar.length(), within(1e-9 * bar.length()));
         double digit = metres / Math.pow(10, Math.floor(Math.log10(metres * (1 + 1e-9))));
-        assertThat(digit).satisfiesAnyOf(
-                one -> assertThat(one).isCloseTo(1, within(1e-9)),
-                two -> assertThat(two).isCloseTo(2, within(1e-9)),
-                five -> assertThat(five).isCloseTo(5, within(1e-9)));
+        assertThat(digit)
+                .satisfiesAnyOf(
+                        one -> assertThat(one).isCloseTo(1, within(1e-9)),
+                        two -> assertThat(two).isCloseTo(2, within(1e-9)),
+                        five -> assertThat(five).isCloseTo(5, within(1e-9)));
         Drawn.isLegible(page(bar.marks(10, 10)));
     }
 
@@ -41,7 +42,7 @@ class MapFurnitureTest {
     @Property(tries = 100)
     void legendsHaveTicksInPlace(@ForAll @DoubleRange(min = -1e5, max = 1e5) double from, @ForAll boolean fine) {
         ValueScale scale = new ValueScale(Ramp.DEPTH, from, from + (fine ? 0.37 : 4321));
-        Picture level = page(RampLegend.level(scale, "head, m", new Box(10, 10, 200, RampLegend.LEVEL_HEIGHT)));
+        Picture level = page(RampLegend.level(scale, 1, "head, m", new Box(10, 10, 200, RampLegend.LEVEL_HEIGHT)));
         Drawn.isLegible(level);
         double wide = RampLegend.uprightWidth(scale, 180);
         Picture upright = page(RampLegend.upright(scale, "head, m", new Box(10, 10, wide, 180)));
@@ -52,7 +53,7 @@ class MapFurnitureTest {
     @Test
     void aTickStandsWhereItsColourIs() {
         ValueScale scale = new ValueScale(Ramp.DEPTH, 0, 10);
-        List<Mark> marks = RampLegend.level(scale, "x", new Box(10, 0, 200, 46));
+        List<Mark> marks = RampLegend.level(scale, 1, "x", new Box(10, 0, 200, 46));
         assertThat(Drawn.of(Mark.Line.class, marks).stream().map(line -> line.xy()[0]))
                 .containsExactly(10.0, 50.0, 90.0, 130.0, 170.0, 210.0);
         int[] upright = Drawn.of(Mark.Image.class, RampLegend.upright(scale, "x", new Box(0, 0, 80, 120)))

@@ -72,8 +72,7 @@ final class RandomLedger {
 
     /** A budget of a day with one interval: inflow and outflow of some accounts. */
     static PeriodBudget day(boolean storageKnown, List<Account> accounts, double[] inflow, double[] outflow) {
-        Ledger ledger =
-                new Ledger("p", accounts, storageKnown, new double[][] {inflow}, new double[][] {outflow});
+        Ledger ledger = new Ledger("p", accounts, storageKnown, new double[][] {inflow}, new double[][] {outflow});
         return ledger.budget(new Period("a day", 0, 1, List.of(new Period.Part(0, 1))));
     }
 

@@ -13,8 +13,7 @@ class SpreadTest {
 
     @Property(tries = 200)
     void noTwoAreTooCloseAndAllLieBetweenTheEnds(@ForAll long seed, @ForAll @IntRange(min = 0, max = 10) int count) {
-        double[] wanted =
-                new Random(seed).doubles(count, -20, 220).sorted().toArray();
+        double[] wanted = new Random(seed).doubles(count, -20, 220).sorted().toArray();
         double[] places = Spread.out(wanted, 20, 10, 190);
         for (int i = 0; i < count; i++) {
             assertThat(places[i]).isBetween(10 - 1e-9, 190 + 1e-9);

@@ -22,8 +22,7 @@ class StorageCurveTest {
         Ledger ledger = new Ledger("p", ACCOUNTS.subList(0, known ? 2 : 1), known, inflow, outflow);
         List<PeriodBudget> budgets = new ArrayList<>();
         for (int i = 0; i < inflow.length; i++) {
-            budgets.add(ledger.budget(
-                    new Period("period " + i, 10 * i, 10 * i + 10, List.of(new Period.Part(i, 10)))));
+            budgets.add(ledger.budget(new Period("period " + i, 10 * i, 10 * i + 10, List.of(new Period.Part(i, 10)))));
         }
         return budgets;
     }
@@ -59,10 +58,9 @@ class StorageCurveTest {
 
     @Test
     void endsWhereNumbersEnd() {
-        Picture picture = curve(budgets(
-                true,
-                new double[][] {{50, 0}, {Double.NaN, 30}, {0, 5}},
-                new double[][] {{20, 20}, {40, 0}, {5, 0}}));
+        Picture picture = curve(budgets(true, new double[][] {{50, 0}, {Double.NaN, 30}, {0, 5}}, new double[][] {
+            {20, 20}, {40, 0}, {5, 0}
+        }));
         assertThat(line(picture, Ink.Token.STORAGE)).hasSize(4);
         assertThat(picture.description()).contains("ends after 1 of 3 periods");
         Picture none = curve(budgets(true, new double[][] {{Double.NaN, 0}}, new double[][] {{0, 0}}));
@@ -80,7 +78,6 @@ class StorageCurveTest {
     void ratesAreRefused() {
         List<PeriodBudget> budgets = budgets(true, new double[][] {{50, 0}}, new double[][] {{20, 20}});
         assertThatIllegalArgumentException()
-                .isThrownBy(() ->
-                        StorageCurve.of("p", budgets, RandomLedger.times(false), RandomLedger.RATE, 760));
+                .isThrownBy(() -> StorageCurve.of("p", budgets, RandomLedger.times(false), RandomLedger.RATE, 760));
     }
 }

@@ -27,15 +27,16 @@ class TimeTicksTest {
                         "2023-10");
         assertThat(labels(start, 730, 300)).containsExactly("2022-01", "2022-07", "2023-01", "2023-07");
         assertThat(labels(start, 36_525, 300)).containsExactly("2040", "2060", "2080", "2100", "2120");
-        assertThat(labels(start.plusDays(2), 3, 400)).containsExactly("2021-10-03", "2021-10-04", "2021-10-05", "2021-10-06");
+        assertThat(labels(start.plusDays(2), 3, 400))
+                .containsExactly("2021-10-03", "2021-10-04", "2021-10-05", "2021-10-06");
         assertThat(labels(start.plusHours(5), 0.4, 700))
                 .containsExactly("2021-10-01 06:00", "2021-10-01 09:00", "2021-10-01 12:00");
     }
 
     @Test
     void aTickStandsAtItsDate() {
-        Times times = new Times(
-                new double[] {5, 100}, Measure.of("d"), Optional.of(LocalDateTime.of(2021, 10, 1, 0, 0)));
+        Times times =
+                new Times(new double[] {5, 100}, Measure.of("d"), Optional.of(LocalDateTime.of(2021, 10, 1, 0, 0)));
         assertThat(TimeTicks.along(times, 5, 100, 400, 11))
                 .containsExactly(
                         new TimeTicks.Tick(5, "2021-10"),
@@ -46,7 +47,6 @@ class TimeTicksTest {
 
     @Test
     void withoutDatesTimeUnitsAreGiven() {
-        assertThat(labels(null, 730, 300))
-                .containsExactly("0\u202fd", "200\u202fd", "400\u202fd", "600\u202fd");
+        assertThat(labels(null, 730, 300)).containsExactly("0\u202fd", "200\u202fd", "400\u202fd", "600\u202fd");
     }
 }

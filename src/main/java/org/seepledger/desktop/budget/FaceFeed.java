@@ -45,12 +45,15 @@ public final class FaceFeed {
     private void tell() {
         Optional<OpenSet> set = session.set().get();
         Optional<Prism> prism = session.selectedPrism();
-        session.faceFlows().set(set.flatMap(open -> prism.flatMap(drawn -> flows(open, drawn)))
-                .orElse(FaceFlows.NONE));
+        session.faceFlows()
+                .set(set.flatMap(open -> prism.flatMap(drawn -> flows(open, drawn)))
+                        .orElse(FaceFlows.NONE));
     }
 
     private Optional<FaceFlows> flows(OpenSet set, Prism prism) {
-        Period interval = set.workbench().periods(Periods.Every.INTERVAL, 1).get(session.interval().get());
+        Period interval = set.workbench()
+                .periods(Periods.Every.INTERVAL, 1)
+                .get(session.interval().get());
         Drawing drawing = session.drawing().get();
         return live.known().get().budget(prism, interval).map(shown -> {
             ResultUnits units = reading.inUse(set);
@@ -60,7 +63,7 @@ public final class FaceFeed {
                     net.put(term.item(), term.net() / interval.duration() * units.rateFactor());
                 }
             }
-            long revision = shown.prism().equals(prism) ? drawing.revision() : drawing.revision() - 1;
+            long revision = shown.prism().equals(prism) ? drawing.revision() : FaceFlows.NONE.revision();
             return new FaceFlows(revision, prism.name(), units.rate().toString(), net);
         });
     }

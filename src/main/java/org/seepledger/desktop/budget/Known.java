@@ -40,7 +40,8 @@ public record Known(Optional<IntervalBudget> now, Optional<RecordBudget> record)
         Optional<BudgetShown> fromNow = now.filter(known -> known.prism().name().equals(prism.name()))
                 .filter(known -> known.budget().period().equals(period))
                 .map(BudgetShown::of);
-        boolean recordHolds = fromRecord.filter(shown -> shown.prism().equals(prism)).isPresent();
+        boolean recordHolds =
+                fromRecord.filter(shown -> shown.prism().equals(prism)).isPresent();
         return recordHolds ? fromRecord : fromNow.or(() -> fromRecord);
     }
 }

@@ -34,6 +34,7 @@ public final class LiveBudget {
     private final Lane quick;
     private final Lane thorough;
     private final ReadOnlyObjectWrapper<Known> known = new ReadOnlyObjectWrapper<>(Known.NOTHING);
+    private final ReadOnlyObjectWrapper<Optional<RecordBudget>> whole = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final ReadOnlyObjectWrapper<PaneState> now = new ReadOnlyObjectWrapper<>(nothing());
     private final ReadOnlyObjectWrapper<PaneState> record = new ReadOnlyObjectWrapper<>(nothing());
     private Optional<Question> asked = Optional.empty();
@@ -52,6 +53,7 @@ public final class LiveBudget {
         this.session = session;
         this.quick = tasks.latest("budget of the interval");
         this.thorough = tasks.latest("budget of the record");
+        known.addListener((last, before, after) -> whole.set(after.record()));
         session.set().addListener((set, before, after) -> begin());
         session.drawing().addListener((drawing, before, after) -> follow());
         session.selected().addListener((selected, before, after) -> follow());
@@ -62,6 +64,11 @@ public final class LiveBudget {
     /** {@return what was last worked out} */
     public ReadOnlyObjectProperty<Known> known() {
         return known.getReadOnlyProperty();
+    }
+
+    /** {@return the budgets of the whole record that were last worked out; it changes more seldom than what is known} */
+    public ReadOnlyObjectProperty<Optional<RecordBudget>> whole() {
+        return whole.getReadOnlyProperty();
     }
 
     /** Asks the map to begin a prism: what leads on where there is none. */
@@ -125,7 +132,8 @@ public final class LiveBudget {
                 || known.get().hasNow(question.prism, question.interval)) {
             now.set(PaneState.READY);
         } else if (asked.isEmpty()) {
-            now.set(PaneState.working(working(known.get().now().isPresent() || known.get().record().isPresent())));
+            now.set(PaneState.working(working(
+                    known.get().now().isPresent() || known.get().record().isPresent())));
             ask(question);
         }
     }

@@ -113,9 +113,8 @@ public final class Reading {
             ResultUnits own = set.workbench().units(Optional.empty(), Optional.empty());
             units.add((volumes.get() ? own.volume() : own.rate()).toString());
         });
-        (volumes.get() ? VOLUMES : RATES).stream()
-                .filter(unit -> !units.contains(unit))
-                .forEach(units::add);
+        (volumes.get() ? VOLUMES : RATES)
+                .stream().filter(unit -> !units.contains(unit)).forEach(units::add);
         return units;
     }
 
@@ -171,8 +170,8 @@ public final class Reading {
      * @param interval the interval, from 0
      */
     public Period period(OpenSet set, int interval) {
-        double middle = set.aquifer().times().instant(interval)
-                + set.aquifer().times().length(interval) / 2;
+        double middle =
+                set.aquifer().times().instant(interval) + set.aquifer().times().length(interval) / 2;
         return periods(set).stream()
                 .filter(period -> middle >= period.from() && middle < period.to())
                 .findFirst()

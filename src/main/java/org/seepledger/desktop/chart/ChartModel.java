@@ -44,7 +44,7 @@ public final class ChartModel {
         this.live = live;
         this.reading = reading;
         session.set().addListener((set, before, after) -> change());
-        live.known().addListener((known, before, after) -> change());
+        live.whole().addListener((whole, before, after) -> change());
         session.selected().addListener((selected, before, after) -> change());
         session.interval().addListener((interval, before, after) -> change());
         reading.changes().addListener((changed, before, after) -> change());
@@ -113,23 +113,29 @@ public final class ChartModel {
      * @param height in logical pixels
      */
     public Optional<BudgetSeries> chart(double width, double height) {
-        return session.set().get().flatMap(set -> ledger().map(ledger -> {
-            List<Period> periods = periods(set);
-            return BudgetSeries.of(
-                    ledger.prism(),
-                    periods.stream().map(ledger::budget).toList(),
-                    set.aquifer().times(),
-                    reading.shown(set),
-                    marked(periods),
-                    Math.max(300, width),
-                    height);
-        }));
+        return session.set()
+                .get()
+                .flatMap(set -> ledger().map(ledger -> {
+                    List<Period> periods = periods(set);
+                    return BudgetSeries.of(
+                            ledger.prism(),
+                            periods.stream().map(ledger::budget).toList(),
+                            set.aquifer().times(),
+                            reading.shown(set),
+                            marked(periods),
+                            Math.max(300, width),
+                            height);
+                }));
     }
 
     private Optional<Ledger> ledger() {
-        return live.known().get().record().map(RecordBudget::balance).flatMap(balance -> balance.ledgers().stream()
-                .filter(ledger -> ledger.prism().equals(session.selected().get()))
-                .findFirst());
+        return live.whole()
+                .get()
+                .map(RecordBudget::balance)
+                .flatMap(balance -> balance.ledgers().stream()
+                        .filter(ledger ->
+                                ledger.prism().equals(session.selected().get()))
+                        .findFirst());
     }
 
     /** One bar for the whole record would show nothing through time: intervals then. */

@@ -51,7 +51,7 @@ public final class ClosureModel {
         this.session = session;
         this.live = live;
         this.reading = reading;
-        live.known().addListener((known, before, after) -> show());
+        live.whole().addListener((whole, before, after) -> show());
         session.selected().addListener((selected, before, after) -> show());
         reading.changes().addListener((changes, before, after) -> show());
         show();
@@ -99,7 +99,9 @@ public final class ClosureModel {
 
     /** Asks the map to show imbalance. */
     public void showImbalance() {
-        spots.stream().findFirst().ifPresent(spot -> session.layer().set(spot.cell().layer()));
+        spots.stream()
+                .findFirst()
+                .ifPresent(spot -> session.layer().set(spot.cell().layer()));
         session.demand().set(Session.Demand.SHOW_IMBALANCE);
     }
 
@@ -122,10 +124,9 @@ public final class ClosureModel {
         notes.clear();
         belongs.set("");
         Optional<OpenSet> set = session.set().get();
-        Optional<RecordBudget> record = live.known().get().record();
+        Optional<RecordBudget> record = live.whole().get();
         if (set.isPresent() && record.isPresent()) {
-            List<String> names =
-                    record.get().prisms().stream().map(Prism::name).toList();
+            List<String> names = record.get().prisms().stream().map(Prism::name).toList();
             int prism = names.indexOf(session.selected().get());
             if (prism >= 0) {
                 show(set.get(), record.get(), prism);
@@ -141,8 +142,7 @@ public final class ClosureModel {
                 .toList();
         PrismResult result = PrismResult.of(set.aquifer(), record.balance(), budgets, prism);
         ResultUnits units = reading.inUse(set);
-        StatedOrigins origins =
-                StatedOrigins.of(set.aquifer(), set.workbench().origins());
+        StatedOrigins origins = StatedOrigins.of(set.aquifer(), set.workbench().origins());
         points.setAll(Answer.of(result, origins, Wording.typeset(units)).points());
         warnings.addAll(set.workbench().warnings());
         warnings.addAll(record.warnings());
@@ -157,10 +157,7 @@ public final class ClosureModel {
 
     private static Spot spot(OpenSet set, HotSpot cell, ResultUnits units) {
         String where = Words.of(
-                "closure.cell",
-                set.aquifer().layers().get(cell.layer()).name(),
-                cell.row() + 1,
-                cell.column() + 1);
+                "closure.cell", set.aquifer().layers().get(cell.layer()).name(), cell.row() + 1, cell.column() + 1);
         Wording words = Wording.typeset(units);
         String imbalance = words.rate(cell.imbalance(), 1);
         return new Spot(cell, CellPlace.of(set.aquifer().grid(), cell), where, imbalance);

@@ -50,7 +50,11 @@ final class CardModel {
         }
         int first = Integer.parseInt(typed.group(1));
         int last = typed.group(2) == null ? first : Integer.parseInt(typed.group(2));
-        int count = model.session().set().get().map(set -> set.aquifer().layers().size()).orElse(1);
+        int count = model.session()
+                .set()
+                .get()
+                .map(set -> set.aquifer().layers().size())
+                .orElse(1);
         if (first < 1 || last < first || last > count) {
             throw new Refusal(Words.of("card.layers.range", count));
         }
@@ -60,7 +64,9 @@ final class CardModel {
     /** Elevations of top and bottom; nothing for the grid's own. */
     void lids(String top, String bottom) {
         if (top.isBlank() && bottom.isBlank()) {
-            change("step.reach", shape -> shape.reach() instanceof Reach.Between ? shape.reaching(new Reach.Whole()) : shape);
+            change(
+                    "step.reach",
+                    shape -> shape.reach() instanceof Reach.Between ? shape.reaching(new Reach.Whole()) : shape);
         } else {
             change("step.reach", shape -> shape.reaching(new Reach.Between(lid(top), lid(bottom))));
         }
@@ -72,7 +78,8 @@ final class CardModel {
             return Optional.empty();
         }
         try {
-            return Optional.of(new Limit.Elevation(Double.parseDouble(text.strip().replace('−', '-'))));
+            return Optional.of(
+                    new Limit.Elevation(Double.parseDouble(text.strip().replace('−', '-'))));
         } catch (NumberFormatException e) {
             Limit.Surface surface = new Limit.Surface(text.strip());
             if (!model.knows(surface)) {
@@ -96,8 +103,7 @@ final class CardModel {
     }
 
     private void change(String step, Function<Shape, Shape> change) {
-        model.selected()
-                .ifPresent(shape -> model.step(step, drawing -> drawing.edit(shape.name(), change::apply)));
+        model.selected().ifPresent(shape -> model.step(step, drawing -> drawing.edit(shape.name(), change::apply)));
     }
 
     String layersText() {

@@ -62,7 +62,8 @@ public final class DraftFiles {
      * @param opening what was opened
      */
     public void begin(Opening opening) {
-        Map<Limit.Surface, GriddedValues> surfaces = new HashMap<>(opening.kept().surfaces());
+        Map<Limit.Surface, GriddedValues> surfaces =
+                new HashMap<>(opening.kept().surfaces());
         opening.unsaved().ifPresent(file -> surfaces.putAll(file.surfaces()));
         Drawing kept = opening.kept().drawing();
         Drawing current = opening.unsaved().map(DrawingFile::drawing).orElse(kept);
@@ -165,7 +166,9 @@ public final class DraftFiles {
         });
         if (added) {
             String notes = String.join(" ", file.notes());
-            model.session().status().set(Words.of("imported", shapes.size(), notes).strip());
+            model.session()
+                    .status()
+                    .set(Words.of("imported", shapes.size(), notes).strip());
         }
     }
 
@@ -180,8 +183,10 @@ public final class DraftFiles {
             return;
         }
         List<String> answers = List.of(Words.of("unsaved.save"), Words.of("unsaved.discard"), Words.of("unsaved.stay"));
-        Optional<Integer> answer =
-                questions.ask(Words.of("unsaved.title"), Words.of("unsaved.question", set().get().aquifer().name()), answers);
+        Optional<Integer> answer = questions.ask(
+                Words.of("unsaved.title"),
+                Words.of("unsaved.question", set().get().aquifer().name()),
+                answers);
         if (answer.equals(Optional.of(0))) {
             OpenSet set = set().get();
             write(set, set.path().resolve(Opening.PRISMS), saved -> go.run());

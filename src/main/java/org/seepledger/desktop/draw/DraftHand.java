@@ -70,8 +70,7 @@ public final class DraftHand implements Hand {
 
     private void merge(Touch touch) {
         Place pointer = new Place(touch.x(), touch.y());
-        Optional<String> other = Hit.at(
-                        model.drawing(), pointer, Nearness.ofPixel(touch.pixel()), Optional.empty())
+        Optional<String> other = Hit.at(model.drawing(), pointer, Nearness.ofPixel(touch.pixel()), Optional.empty())
                 .map(Hit::shape);
         Optional<String> one = model.selected().map(Shape::name);
         if (other.isEmpty() || other.equals(one)) {

@@ -35,6 +35,12 @@ public final class DraftModel {
      */
     public DraftModel(Session session) {
         this.session = session;
+        session.demand().addListener((demand, before, after) -> {
+            if (after == Session.Demand.DRAW_PRISM) {
+                session.demand().set(Session.Demand.NONE);
+                choose(Tool.POLYGON);
+            }
+        });
     }
 
     /**
@@ -52,7 +58,9 @@ public final class DraftModel {
         if (!current.equals(kept)) {
             history.step(Words.of("step.restore"), current);
         }
-        current.shapes().stream().findFirst().ifPresent(shape -> session.selected().set(shape.name()));
+        current.shapes().stream()
+                .findFirst()
+                .ifPresent(shape -> session.selected().set(shape.name()));
         publish(true);
     }
 
@@ -68,7 +76,8 @@ public final class DraftModel {
     }
 
     private void publish(boolean settled) {
-        int layers = session.set().get().map(set -> set.aquifer().layers().size()).orElse(1);
+        int layers =
+                session.set().get().map(set -> set.aquifer().layers().size()).orElse(1);
         session.drawing()
                 .set(new org.seepledger.desktop.session.Drawing(
                         session.drawing().get().revision() + 1,

@@ -51,9 +51,7 @@ final class SelectHand {
             return Aim.PAN;
         }
         boolean chosen = model.session().selected().get().equals(under.get().shape());
-        return under.get() instanceof Hit.Vertex || under.get() instanceof Hit.Body && chosen
-                ? Aim.MOVE
-                : Aim.CHOOSE;
+        return under.get() instanceof Hit.Vertex || under.get() instanceof Hit.Body && chosen ? Aim.MOVE : Aim.CHOOSE;
     }
 
     void hover(Touch touch) {
@@ -174,12 +172,12 @@ final class SelectHand {
             RingAt ring = vertex.get().ring();
             if (model.step(
                     "step.delete.vertex",
-                    drawing -> drawing.edit(ring, outline -> outline.delete(vertex.get().vertex())))) {
+                    drawing -> drawing.edit(
+                            ring, outline -> outline.delete(vertex.get().vertex())))) {
                 pick.nothing();
             }
         } else {
-            model.selected()
-                    .ifPresent(shape -> model.step("step.delete", drawing -> drawing.without(shape.name())));
+            model.selected().ifPresent(shape -> model.step("step.delete", drawing -> drawing.without(shape.name())));
         }
     }
 

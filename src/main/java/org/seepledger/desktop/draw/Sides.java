@@ -17,7 +17,8 @@ final class Sides {
         Place to = shape.outlines().get(at).place(side + 1);
         for (Ring ring : shape.rings()) {
             for (int i = 0; i < ring.sides().size(); i++) {
-                Place begin = new Place(ring.sides().get(i).x(), ring.sides().get(i).y());
+                Place begin =
+                        new Place(ring.sides().get(i).x(), ring.sides().get(i).y());
                 Place end = new Place(ring.after(i).x(), ring.after(i).y());
                 if (begin.equals(from) && end.equals(to) || begin.equals(to) && end.equals(from)) {
                     return Optional.of(ring.sides().get(i).item());

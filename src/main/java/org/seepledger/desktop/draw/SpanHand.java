@@ -45,14 +45,14 @@ final class SpanHand {
 
     private Optional<Place> well(Touch touch) {
         Place pointer = new Place(touch.x(), touch.y());
-        return model.session().set().get().flatMap(set -> set
-                .workbench()
-                .wells(model.session().interval().get())
-                .stream()
-                .map(SpanHand::place)
-                .filter(place -> place.distance(pointer)
-                        <= Nearness.ofPixel(touch.pixel()).capture())
-                .min(Comparator.comparingDouble(place -> place.distance(pointer))));
+        return model.session()
+                .set()
+                .get()
+                .flatMap(set -> set.workbench().wells(model.session().interval().get()).stream()
+                        .map(SpanHand::place)
+                        .filter(place -> place.distance(pointer)
+                                <= Nearness.ofPixel(touch.pixel()).capture())
+                        .min(Comparator.comparingDouble(place -> place.distance(pointer))));
     }
 
     private static Place place(WellPlace well) {
@@ -84,7 +84,8 @@ final class SpanHand {
         Place to = end.orElseThrow();
         return model.tool().get() == Tool.CIRCLE
                 ? Figure.circle(from, from.distance(to), VERTICES)
-                : Figure.rectangle(from, to, model.grid().map(grid -> grid.rotation()).orElse(0.0));
+                : Figure.rectangle(
+                        from, to, model.grid().map(grid -> grid.rotation()).orElse(0.0));
     }
 
     /** Draws the circle of a typed radius, in plan units, about the centre that was clicked. */

@@ -58,13 +58,15 @@ final class StrokeHand {
     /** What is refused stays as it is drawn, to be mended. */
     void finish() {
         boolean done = switch (model.tool().get()) {
-            case ISLAND -> model.selected()
-                    .map(shape -> model.step("step.island", drawing -> island(drawing, shape)))
-                    .orElse(false);
-            case SPLIT -> model.selected()
-                    .map(shape -> model.step(
-                            "step.split", drawing -> drawing.split(shape.name(), stroke.places(), model.near())))
-                    .orElse(false);
+            case ISLAND ->
+                model.selected()
+                        .map(shape -> model.step("step.island", drawing -> island(drawing, shape)))
+                        .orElse(false);
+            case SPLIT ->
+                model.selected()
+                        .map(shape -> model.step(
+                                "step.split", drawing -> drawing.split(shape.name(), stroke.places(), model.near())))
+                        .orElse(false);
             default -> draw();
         };
         if (done) {

@@ -36,8 +36,7 @@ public final class Tray extends HBox {
         card.setVisible(false);
         card.managedProperty().bind(card.visibleProperty());
         getChildren().addAll(card, tools());
-        visibleProperty()
-                .bind(model.session().set().map(java.util.Optional::isPresent));
+        visibleProperty().bind(model.session().set().map(java.util.Optional::isPresent));
     }
 
     private VBox tools() {

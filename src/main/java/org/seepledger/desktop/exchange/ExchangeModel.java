@@ -48,7 +48,7 @@ public final class ExchangeModel {
         this.live = live;
         this.reading = reading;
         this.copies = copies;
-        live.known().addListener((known, before, after) -> show());
+        live.whole().addListener((whole, before, after) -> show());
         session.interval().addListener((interval, before, after) -> show());
         reading.changes().addListener((changed, before, after) -> show());
         show();
@@ -85,11 +85,17 @@ public final class ExchangeModel {
      * @param width in logical pixels
      */
     public Optional<Picture> diagram(double width) {
-        return session.set().get().flatMap(set -> live.known().get().record().map(record -> {
-            Period period = reading.period(set, session.interval().get());
-            return ExchangeDiagram.of(
-                    names(record), record.balance().exchange(), period, reading.shown(set), Math.max(320, width));
-        }));
+        return session.set()
+                .get()
+                .flatMap(set -> live.whole().get().map(record -> {
+                    Period period = reading.period(set, session.interval().get());
+                    return ExchangeDiagram.of(
+                            names(record),
+                            record.balance().exchange(),
+                            period,
+                            reading.shown(set),
+                            Math.max(320, width));
+                }));
     }
 
     /** Copies the matrix with its unit, in full precision. */
@@ -106,7 +112,7 @@ public final class ExchangeModel {
 
     private void show() {
         Optional<OpenSet> set = session.set().get();
-        Optional<RecordBudget> record = live.known().get().record();
+        Optional<RecordBudget> record = live.whole().get();
         matrix = set.flatMap(open -> record.map(known -> matrix(open, known)));
         belongs.set(set.filter(open -> record.isPresent())
                 .map(open -> Words.of(

@@ -121,7 +121,8 @@ final class LedgerChoices extends VBox {
         filling = true;
         units.getItems().setAll(reading.units());
         String unit = reading.unit().get();
-        units.setValue(unit.isEmpty() && !units.getItems().isEmpty() ? units.getItems().get(0) : unit);
+        units.setValue(
+                unit.isEmpty() && !units.getItems().isEmpty() ? units.getItems().get(0) : unit);
         filling = false;
     }
 

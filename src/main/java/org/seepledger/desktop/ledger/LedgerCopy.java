@@ -30,10 +30,14 @@ record LedgerCopy(String title, String unit, List<LedgerRow> rows) {
         text.append("</tr></thead><tbody>");
         for (LedgerRow row : rows) {
             if (row.kind() == LedgerRow.Kind.HEADING) {
-                text.append("<tr><th colspan=\"5\">").append(escaped(row.label())).append("</th></tr>");
+                text.append("<tr><th colspan=\"5\">")
+                        .append(escaped(row.label()))
+                        .append("</th></tr>");
             } else {
                 text.append("<tr>");
-                cells(row).forEach(cell -> text.append("<td>").append(escaped(cell)).append("</td>"));
+                cells(row)
+                        .forEach(cell ->
+                                text.append("<td>").append(escaped(cell)).append("</td>"));
                 text.append("</tr>");
             }
         }
@@ -70,6 +74,9 @@ record LedgerCopy(String title, String unit, List<LedgerRow> rows) {
     }
 
     private static String escaped(String text) {
-        return text.replace("&", "&amp;").replace("<", "&lt;").replace(">", "&gt;").replace("\"", "&quot;");
+        return text.replace("&", "&amp;")
+                .replace("<", "&lt;")
+                .replace(">", "&gt;")
+                .replace("\"", "&quot;");
     }
 }

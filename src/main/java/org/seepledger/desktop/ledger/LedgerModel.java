@@ -38,6 +38,7 @@ public final class LedgerModel {
     private final ReadOnlyObjectWrapper<PaneState> state = new ReadOnlyObjectWrapper<>(PaneState.READY);
     private final ObjectProperty<Arrangement> arrangement = new SimpleObjectProperty<>(Arrangement.ITEMS);
     private final ObjectProperty<Order> order = new SimpleObjectProperty<>(Order.AS_DRAWN);
+    private double largest;
 
     /**
      * Makes the model.
@@ -155,12 +156,6 @@ public final class LedgerModel {
      * @param value what comes in or goes out
      */
     public double share(double value) {
-        double largest = rows.stream()
-                .filter(row -> row.kind() == LedgerRow.Kind.ENTRY)
-                .flatMapToDouble(row -> DoubleStream.of(row.inflow(), row.outflow()))
-                .filter(each -> !Double.isNaN(each))
-                .max()
-                .orElse(0);
         return largest == 0 || Double.isNaN(value) ? 0 : value / largest;
     }
 
@@ -169,7 +164,10 @@ public final class LedgerModel {
         Optional<Prism> prism = session.selectedPrism();
         if (set.isPresent() && prism.isPresent()) {
             Period period = reading.period(set.get(), session.interval().get());
-            live.known().get().budget(prism.get(), period).ifPresentOrElse(shown -> show(set.get(), shown), this::clear);
+            live.known()
+                    .get()
+                    .budget(prism.get(), period)
+                    .ifPresentOrElse(shown -> show(set.get(), shown), this::clear);
         } else {
             clear();
         }
@@ -178,8 +176,15 @@ public final class LedgerModel {
 
     private void show(OpenSet set, BudgetShown shown) {
         List<String> layers = set.aquifer().layers().stream().map(Layer::name).toList();
-        rows.setAll(new LedgerRows(shown.budget(), layers, reading.shown(set), order.get())
-                .arranged(arrangement.get()));
+        List<LedgerRow> arranged =
+                new LedgerRows(shown.budget(), layers, reading.shown(set), order.get()).arranged(arrangement.get());
+        largest = arranged.stream()
+                .filter(row -> row.kind() == LedgerRow.Kind.ENTRY)
+                .flatMapToDouble(row -> DoubleStream.of(row.inflow(), row.outflow()))
+                .filter(value -> !Double.isNaN(value))
+                .max()
+                .orElse(0);
+        rows.setAll(arranged);
         unit.set(reading.unitName(set));
         belongs.set(shown.whose(set));
         notes.set(String.join(" ", shown.notes()));

@@ -38,7 +38,8 @@ final class LedgerRows {
 
     List<LedgerRow> arranged(Arrangement arrangement) {
         switch (arrangement) {
-            case ITEMS -> sections(Term.of(budget).stream().map(LedgerRows::line).toList());
+            case ITEMS ->
+                sections(Term.of(budget).stream().map(LedgerRows::line).toList());
             case ITEMS_BY_LAYER -> sections(Line.each(budget.entries()));
             case LAYERS -> layers(Line.byLayer(budget.entries()));
         }
@@ -57,9 +58,8 @@ final class LedgerRows {
     }
 
     private void section(List<Line> lines, String words, List<Group> groups) {
-        List<Line> own = lines.stream()
-                .filter(line -> groups.contains(line.group()))
-                .toList();
+        List<Line> own =
+                lines.stream().filter(line -> groups.contains(line.group())).toList();
         if (!own.isEmpty()) {
             rows.add(LedgerRow.heading(groups.get(0), Line.ALL_LAYERS, Words.of(words)));
             sorted(own).forEach(line -> rows.add(row(line, label(line))));
@@ -109,7 +109,14 @@ final class LedgerRows {
             LedgerRow.Kind kind = total.isPercentage() ? LedgerRow.Kind.PERCENTAGE : LedgerRow.Kind.TOTAL;
             double value = total.isPercentage() ? totals.get(total) : amount(totals.get(total));
             rows.add(new LedgerRow(
-                    kind, Group.TOTAL, total.toString(), Line.ALL_LAYERS, total.toString(), Double.NaN, Double.NaN, value));
+                    kind,
+                    Group.TOTAL,
+                    total.toString(),
+                    Line.ALL_LAYERS,
+                    total.toString(),
+                    Double.NaN,
+                    Double.NaN,
+                    value));
         }
     }
 }

@@ -105,7 +105,8 @@ public final class LedgerView extends BorderPane {
 
     private static TableColumn<LedgerRow, LedgerRow> shown(
             TableColumn<LedgerRow, LedgerRow> column,
-            javafx.util.Callback<TableColumn<LedgerRow, LedgerRow>, javafx.scene.control.TableCell<LedgerRow, LedgerRow>>
+            javafx.util.Callback<
+                            TableColumn<LedgerRow, LedgerRow>, javafx.scene.control.TableCell<LedgerRow, LedgerRow>>
                     cells) {
         column.setSortable(false);
         column.setReorderable(false);
@@ -120,7 +121,8 @@ public final class LedgerView extends BorderPane {
         button.getStyleClass().add("sl-header");
         button.setFocusTraversable(false);
         button.setOnAction(pressed -> model.sort(order));
-        button.pseudoClassStateChanged(PseudoClass.getPseudoClass("sorted"), model.order().get() == order);
+        button.pseudoClassStateChanged(
+                PseudoClass.getPseudoClass("sorted"), model.order().get() == order);
         model.order()
                 .addListener((ordered, before, after) -> button.pseudoClassStateChanged(
                         PseudoClass.getPseudoClass("sorted"), after == order && order != Order.AS_DRAWN));

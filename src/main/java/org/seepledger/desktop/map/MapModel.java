@@ -58,8 +58,8 @@ public final class MapModel {
     /** Puts a cell into the middle, near enough to be seen among its neighbours. */
     private void goTo(CellPlace place) {
         Camera seen = camera.get();
-        double nearer = grid().map(grid -> CELL_SEEN
-                        / Math.min(grid.x().smallest(), grid.y().smallest()))
+        double nearer = grid().map(grid ->
+                        CELL_SEEN / Math.min(grid.x().smallest(), grid.y().smallest()))
                 .orElse(seen.scale());
         double scale = limits().within(Math.max(seen.scale(), nearer));
         camera.set(new Camera(seen.width(), seen.height(), place.x(), place.y(), scale));

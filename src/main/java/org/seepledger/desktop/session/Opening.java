@@ -36,7 +36,9 @@ public record Opening(OpenSet set, DrawingFile kept, Optional<DrawingFile> unsav
         OpenSet set = new OpenSet(path, Workbench.open(path));
         try {
             return new Opening(
-                    set, drawing(path.resolve(PRISMS), set).orElse(DrawingFile.NONE), drawing(path.resolve(UNSAVED), set));
+                    set,
+                    drawing(path.resolve(PRISMS), set).orElse(DrawingFile.NONE),
+                    drawing(path.resolve(UNSAVED), set));
         } catch (RuntimeException e) {
             set.close();
             throw e;

@@ -26,14 +26,14 @@ final class SolutesReader {
         Map<String, Integer> names = new HashMap<>();
         for (int i = 0; i < nodes.size(); i++) {
             JsonNode node = nodes.get(i);
-            String place = "solutes[" + i + "]";
+            String place = KeyPlace.entry("solutes", i);
             String name = node.get("name").textValue();
             Integer other = names.putIfAbsent(name, i);
             if (other != null) {
                 throw new DataFault(
                         AquiferReader.FILE,
-                        place + ".name",
-                        "\"" + name + "\", which solutes[" + other + "] has already",
+                        KeyPlace.key(place, "name"),
+                        "\"" + name + "\", which entry " + (other + 1) + " has already",
                         "names that differ",
                         "Rename one.");
             }
@@ -48,7 +48,7 @@ final class SolutesReader {
                 .map(node -> bindings.values(
                         key.replace('_', ' ') + " of " + name,
                         node,
-                        place + "." + key,
+                        KeyPlace.key(place, key),
                         Measure.number(),
                         StepKind.NONE));
     }

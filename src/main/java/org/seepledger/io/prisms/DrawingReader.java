@@ -31,7 +31,7 @@ public record DrawingReader(PlanCrs crs, int layers, Consumer<String> notes) {
      */
     public Drawing read(Path file, String shownFile) {
         List<Shape> shapes = new ArrayList<>();
-        new ShapesReader(crs, layers, notes, flaw -> notes.accept(flaw.getMessage()))
+        new ShapesReader(crs, layers, notes, notes, flaw -> notes.accept(flaw.getMessage()))
                 .read(file, shownFile, (shape, spot) -> shapes.add(shape));
         return new Drawing(shapes);
     }

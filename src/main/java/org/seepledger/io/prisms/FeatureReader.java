@@ -48,7 +48,7 @@ final class FeatureReader {
                     "an object of type " + Spot.shown(feature.path("type")), "a Feature", "Correct the file there.");
         }
         JsonNode properties = feature.path("properties");
-        keys.look(properties::fieldNames, bare);
+        keys.look(properties, bare);
         String name = name(properties, bare, number);
         Spot spot = new Spot(file, bare.place() + " " + Spot.quoted(name));
         JsonNode geometry = feature.path("geometry");

@@ -30,10 +30,17 @@ import org.seepledger.sketch.Shape;
  * @param layers how many layers it has
  * @param clip whether prisms that reach beyond the grid are cut at its edge; else they are refused
  * @param surfaces reads the rasters that stand for a top or bottom
- * @param notes told what a user should know, a line each
+ * @param warnings told what may make a number wrong, a line each
+ * @param notes told what else a user should know, a line each
  */
 public record PrismsReader(
-        PlanCrs crs, Grid grid, int layers, boolean clip, SurfaceReader surfaces, Consumer<String> notes) {
+        PlanCrs crs,
+        Grid grid,
+        int layers,
+        boolean clip,
+        SurfaceReader surfaces,
+        Consumer<String> warnings,
+        Consumer<String> notes) {
 
     /**
      * {@return the prisms of a file, in its order}
@@ -45,7 +52,7 @@ public record PrismsReader(
     public List<Prism> read(Path file, String shownFile) {
         DataFolder folder = DataFolder.holding(file, shownFile);
         List<Prism> prisms = new ArrayList<>();
-        new ShapesReader(crs, layers, notes, PrismsReader::refuse)
+        new ShapesReader(crs, layers, warnings, notes, PrismsReader::refuse)
                 .read(file, shownFile, (shape, spot) -> prisms.add(onGrid(shape, folder, spot)));
         if (prisms.isEmpty()) {
             throw new Spot(shownFile, "").fault("no features", "at least one polygon", "Draw a prism.");
@@ -84,7 +91,7 @@ public record PrismsReader(
     public List<Prism> asDrawn(Path file, String shownFile) {
         DataFolder folder = DataFolder.holding(file, shownFile);
         List<Prism> prisms = new ArrayList<>();
-        new ShapesReader(crs, layers, notes, PrismsReader::refuse)
+        new ShapesReader(crs, layers, warnings, notes, PrismsReader::refuse)
                 .read(file, shownFile, (shape, spot) -> prisms.add(prism(shape, folder, spot)));
         return prisms;
     }
@@ -142,7 +149,7 @@ public record PrismsReader(
             throw spot.fault(
                     "a polygon that lies outside the grid",
                     "a polygon on the grid, which has " + extent(),
-                    "Check the coordinates and the CRS of both.");
+                    crs.isLocal() ? remedyForLocal(prism) : "Check the coordinates and the CRS of both.");
         }
         if (!clip) {
             throw spot.fault(
@@ -158,6 +165,17 @@ public record PrismsReader(
             notes.accept(spot + ": wholly outside the grid, and without rows, are " + String.join(", ", lost));
         }
         return left;
+    }
+
+    /** Where coordinates are local ones, a GIS's longitudes and latitudes are the likeliest mistake. */
+    private static String remedyForLocal(Prism prism) {
+        boolean degrees = prism.rings().stream()
+                .flatMap(ring -> ring.sides().stream())
+                .allMatch(side -> Math.abs(side.x()) <= 180 && Math.abs(side.y()) <= 90);
+        return degrees
+                ? "They look like longitude and latitude, but the aquifer's crs is null, so that they are taken as local"
+                        + " coordinates: name the aquifer's crs in aquifer.json, or write the polygon in its coordinates."
+                : "Check the coordinates: the aquifer's crs is null, so that both must be in the same local ones.";
     }
 
     private static Set<String> items(Prism prism) {

@@ -16,10 +16,12 @@ import org.seepledger.sketch.Shape;
  *
  * @param crs the aquifer's plan coordinates
  * @param layers how many layers its grid has
- * @param notes told what a user should know, a line each
+ * @param warnings told what may make a number wrong, a line each
+ * @param notes told what else a user should know, a line each
  * @param flaws told what keeps rings from being a polygon; whoever wants none throws it
  */
-record ShapesReader(PlanCrs crs, int layers, Consumer<String> notes, Consumer<DataFault> flaws) {
+record ShapesReader(
+        PlanCrs crs, int layers, Consumer<String> warnings, Consumer<String> notes, Consumer<DataFault> flaws) {
 
     /**
      * Reads a file.
@@ -37,7 +39,7 @@ record ShapesReader(PlanCrs crs, int layers, Consumer<String> notes, Consumer<Da
         FeatureReader reader = new FeatureReader(
                 new RingsReader(fileCrs.transform(root, whole), fileCrs.remedyForDegrees()),
                 new ReachReader(layers),
-                new OwnKeys(notes),
+                new OwnKeys(warnings, notes),
                 flaws);
         for (int number = 1; number <= features.size(); number++) {
             Shape shape = reader.read(features.get(number - 1), number, shownFile);

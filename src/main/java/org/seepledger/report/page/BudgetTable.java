@@ -1,6 +1,5 @@
 package org.seepledger.report.page;
 
-import static j2html.TagCreator.caption;
 import static j2html.TagCreator.details;
 import static j2html.TagCreator.div;
 import static j2html.TagCreator.each;
@@ -71,13 +70,13 @@ final class BudgetTable {
 
     private TableTag framed(String title, List<DomContent> bodies) {
         return table(
-                        caption(title),
+                        Cells.caption(title),
                         thead(tr(
                                 Cells.column("Item"),
                                 Cells.numberColumn("In"),
                                 Cells.numberColumn("Out"),
                                 Cells.numberColumn("Net"),
-                                Cells.numberColumn("Net of throughput"))),
+                                Cells.numberColumn("Of throughput"))),
                         each(bodies.stream()))
                 .withClass("budget")
                 .withData("prism", prism)

@@ -1,6 +1,5 @@
 package org.seepledger.report.page;
 
-import static j2html.TagCreator.caption;
 import static j2html.TagCreator.div;
 import static j2html.TagCreator.each;
 import static j2html.TagCreator.h3;
@@ -69,7 +68,7 @@ final class ClosureSection {
         return Cells.scrolling(
                 title,
                 table(
-                                caption(title),
+                                Cells.caption(title),
                                 thead(tr(
                                         Cells.column("Layer"),
                                         Cells.numberColumn("Row"),

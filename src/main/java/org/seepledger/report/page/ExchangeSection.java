@@ -1,6 +1,5 @@
 package org.seepledger.report.page;
 
-import static j2html.TagCreator.caption;
 import static j2html.TagCreator.each;
 import static j2html.TagCreator.h2;
 import static j2html.TagCreator.p;
@@ -45,7 +44,7 @@ final class ExchangeSection {
                 : Cells.scrolling(
                         title,
                         table(
-                                        caption(title),
+                                        Cells.caption(title),
                                         thead(tr(Cells.column("From"), Cells.column("To"), Cells.numberColumn("Flow"))),
                                         tbody(each(flows, flow -> row(report, flow))))
                                 .withClass("exchange"));

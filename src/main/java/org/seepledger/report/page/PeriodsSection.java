@@ -1,6 +1,5 @@
 package org.seepledger.report.page;
 
-import static j2html.TagCreator.caption;
 import static j2html.TagCreator.each;
 import static j2html.TagCreator.h2;
 import static j2html.TagCreator.p;
@@ -40,7 +39,7 @@ final class PeriodsSection {
         return Cells.scrolling(
                 title,
                 table(
-                                caption(title),
+                                Cells.caption(title),
                                 thead(tr(columns.toArray(DomContent[]::new))),
                                 tbody(each(result.periods(), budget -> row(report, totals, budget))))
                         .withClass("periods")

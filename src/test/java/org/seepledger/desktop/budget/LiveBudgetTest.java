@@ -34,7 +34,9 @@ class LiveBudgetTest {
     void open() {
         Opening opening = Opening.of(Path.of("sample-aquifers/valley"));
         set = opening.set();
-        prisms = set.workbench().read(set.path().resolve(Opening.PRISMS)).prisms();
+        prisms = set.workbench()
+                .read(Path.of("sample-aquifers/valley/prisms.geojson"))
+                .prisms();
     }
 
     @AfterEach
@@ -64,7 +66,8 @@ class LiveBudgetTest {
                                 .toList()))
                 .toList();
         Prism moved = new Prism(first.name(), rings, first.range());
-        return java.util.stream.Stream.concat(java.util.stream.Stream.of(moved), prisms.stream().skip(1))
+        return java.util.stream.Stream.concat(
+                        java.util.stream.Stream.of(moved), prisms.stream().skip(1))
                 .toList();
     }
 
@@ -182,7 +185,8 @@ class LiveBudgetTest {
         assertThat(flows.net()).containsKeys("far bank", "side 3").doesNotContainKeys("top", "recharge");
         assertThat(flows.revision()).isEqualTo(session.drawing().get().revision());
         draw(moved(40), false);
-        assertThat(session.faceFlows().get().revision()).isNotEqualTo(session.drawing().get().revision());
+        assertThat(session.faceFlows().get().revision())
+                .isNotEqualTo(session.drawing().get().revision());
     }
 
     @Test

@@ -16,8 +16,7 @@ import org.seepledger.unit.Figures;
 class ExchangeModelTest {
 
     private final LiveSet valley = LiveSet.valley();
-    private final ExchangeModel model =
-            new ExchangeModel(valley.session, valley.live, valley.reading, valley.answers);
+    private final ExchangeModel model = new ExchangeModel(valley.session, valley.live, valley.reading, valley.answers);
 
     @AfterEach
     void close() {
@@ -25,11 +24,13 @@ class ExchangeModelTest {
     }
 
     private double rate(String giver, String receiver) {
-        Period period = valley.reading.period(valley.set, valley.session.interval().get());
+        Period period =
+                valley.reading.period(valley.set, valley.session.interval().get());
         List<ExchangeFlow> flows =
                 valley.live.known().get().record().orElseThrow().balance().exchange();
         return flows.stream()
-                        .filter(flow -> flow.giver().equals(giver) && flow.receiver().equals(receiver))
+                        .filter(flow ->
+                                flow.giver().equals(giver) && flow.receiver().equals(receiver))
                         .mapToDouble(flow -> flow.volume(period))
                         .sum()
                 / period.duration();
@@ -38,7 +39,8 @@ class ExchangeModelTest {
     @Test
     void eachPlaceOfTheMatrixIsWhatTheRowGivesTheColumn() {
         Matrix matrix = model.matrix().orElseThrow();
-        assertThat(matrix.names()).containsExactly("well field", "north fields", "river meadow", "south terrace", "outside");
+        assertThat(matrix.names())
+                .containsExactly("well field", "north fields", "river meadow", "south terrace", "outside");
         assertThat(rate("well field", "north fields")).isPositive();
         assertThat(matrix.text(0, 1)).isEqualTo(Figures.tabular(rate("well field", "north fields")));
         assertThat(matrix.text(4, 0)).isEqualTo(Figures.tabular(rate("outside", "well field")));
@@ -59,7 +61,8 @@ class ExchangeModelTest {
     @Test
     void theDiagramShowsTheSame() {
         assertThat(model.diagram(480).orElseThrow().description())
-                .contains("In m³/d", "well field to north fields " + Figures.typeset(rate("well field", "north fields")));
+                .contains(
+                        "In m³/d", "well field to north fields " + Figures.typeset(rate("well field", "north fields")));
     }
 
     @Test

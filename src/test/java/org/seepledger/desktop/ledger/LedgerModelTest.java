@@ -44,7 +44,8 @@ class LedgerModelTest {
                 .get()
                 .budget(
                         valley.prisms.get(0),
-                        valley.reading.period(valley.set, valley.session.interval().get()))
+                        valley.reading.period(
+                                valley.set, valley.session.interval().get()))
                 .orElseThrow()
                 .budget();
     }
@@ -55,7 +56,8 @@ class LedgerModelTest {
         assertThat(labels(Kind.ENTRY)).startsWith("far bank", "side 3").contains("top", "recharge", "elastic storage");
         assertThat(labels(Kind.TOTAL)).containsExactly("inflow", "outflow", "storage change", "residual");
         assertThat(labels(Kind.PERCENTAGE)).containsExactly("closure error", "net closure error");
-        assertThat(model.belongs().get()).isEqualTo("well field, layers 1 to 3, 503\u202f700 m² · interval 1, 2021-10-01 to 2021-11-01");
+        assertThat(model.belongs().get())
+                .isEqualTo("well field, layers 1 to 3, 503\u202f700 m² · interval 1, 2021-10-01 to 2021-11-01");
     }
 
     @Test
@@ -152,7 +154,7 @@ class LedgerModelTest {
 
     @Test
     void numbersOfOneColumnHaveFourDigitsAndOneSign() {
-        LedgerRow row = new LedgerRow(Kind.ENTRY, Group.SIDE, "a", 0, "a", 780, 0.5, -1234.5);
+        LedgerRow row = new LedgerRow(Kind.ENTRY, Group.SIDE, "a", 0, "a", 780, 0.5, -1234.4);
         assertThat(row.text(row.inflow())).isEqualTo("780.0");
         assertThat(row.text(row.outflow())).isEqualTo("0.5000");
         assertThat(row.text(row.net())).isEqualTo("−1\u202f234");

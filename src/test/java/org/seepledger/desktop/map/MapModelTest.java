@@ -28,7 +28,14 @@ class MapModelTest {
         assertThat(model.values().state().get().phase()).isEqualTo(PaneState.Phase.EMPTY);
         opening = Opening.of(Path.of("sample-aquifers/valley"));
         session.show(Optional.of(opening.set()));
-        session.drawing().set(new Drawing(1, opening.set().workbench().read(Path.of("sample-aquifers/valley/prisms.geojson")).prisms(), true));
+        session.drawing()
+                .set(new Drawing(
+                        1,
+                        opening.set()
+                                .workbench()
+                                .read(Path.of("sample-aquifers/valley/prisms.geojson"))
+                                .prisms(),
+                        true));
     }
 
     @AfterEach
@@ -67,8 +74,13 @@ class MapModelTest {
         assertThat(readout.place()).isEqualTo("x 501\u202f225.0   y 5\u202f201\u202f175.0");
         assertThat(readout.cell()).isEqualTo("row 25, column 25, layer 1");
         double[] head = new double[1];
-        session.set().get().orElseThrow().aquifer().head().orElseThrow().read(
-                0, 1, new org.seepledger.aquifer.Window(24, 24, 1, 1), head, 0);
+        session.set()
+                .get()
+                .orElseThrow()
+                .aquifer()
+                .head()
+                .orElseThrow()
+                .read(0, 1, new org.seepledger.aquifer.Window(24, 24, 1, 1), head, 0);
         assertThat(readout.value()).startsWith("head ").endsWith(" m");
         assertThat(Double.parseDouble(readout.value().split(" ")[1])).isCloseTo(head[0], within(0.051));
         model.point(0, 0);
@@ -112,7 +124,9 @@ class MapModelTest {
             model.values().quantity().set(Optional.of(quantity));
             for (int layer = 0; layer < 3; layer++) {
                 session.layer().set(layer);
-                assertThat(model.values().state().get()).as(quantity + " " + layer).isEqualTo(PaneState.READY);
+                assertThat(model.values().state().get())
+                        .as(quantity + " " + layer)
+                        .isEqualTo(PaneState.READY);
                 assertThat(shown().request().layer()).isEqualTo(layer);
             }
         }

@@ -16,7 +16,8 @@ class PyramidTest {
     @Test
     void aLevelHasTheMeansOfThoseOfFourThatHaveAValue() {
         double nan = Double.NaN;
-        Pyramid.Level level = even(3, 3, 1, 2, 9, 3, nan, 11, nan, nan, nan).level(0).reduced();
+        Pyramid.Level level =
+                even(3, 3, 1, 2, 9, 3, nan, 11, nan, nan, nan).level(0).reduced();
         assertThat(level.rows()).isEqualTo(2);
         assertThat(level.columns()).isEqualTo(2);
         assertThat(level.values()).containsExactly(2f, 10f, Float.NaN, Float.NaN);

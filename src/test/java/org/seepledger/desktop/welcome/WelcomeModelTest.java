@@ -22,7 +22,8 @@ class WelcomeModelTest {
 
     private final GivenAnswers answers = new GivenAnswers();
     private final List<Opening> opened = new ArrayList<>();
-    private final WelcomeModel model = new WelcomeModel(new DirectTasks(), answers, answers, opened::add, Runnable::run);
+    private final WelcomeModel model =
+            new WelcomeModel(new DirectTasks(), answers, answers, opened::add, Runnable::run);
 
     @AfterEach
     void close() {
