@@ -44,13 +44,13 @@ public final class Figures {
     }
 
     /**
-     * {@return a number as {@link #shown(double)}, but 0 where it is nothing but rounding}
+     * {@return a number, but 0 where it is nothing but rounding}
      *
      * @param value the number
      * @param scale the magnitude of the numbers that it was reckoned from
      */
-    public static String shown(double value, double scale) {
-        return shown(Math.abs(value) < ROUNDING * scale ? 0 : value);
+    public static double withoutRounding(double value, double scale) {
+        return Math.abs(value) < ROUNDING * scale ? 0 : value;
     }
 
     /**

@@ -15,22 +15,22 @@ class FiguresTest {
         assertThat(Figures.shown(-0.0)).isEqualTo("0");
     }
 
-    /** A sum of terms of about 1000 is exact to 1e-9 at best. */
-    @Test
-    void roundingIsZeroBesideWhatItCameFrom() {
-        assertThat(Figures.shown(1.7e-18, 1e3)).isEqualTo("0");
-        assertThat(Figures.shown(-9e-10, 1e3)).isEqualTo("0");
-        assertThat(Figures.shown(-2e-9, 1e3)).isEqualTo("-2.000e-09");
-        assertThat(Figures.shown(1.7e-18, 1e-17)).isEqualTo("1.700e-18");
-        assertThat(Figures.shown(1.7e-18, 0)).isEqualTo("1.700e-18");
-        assertThat(Figures.shown(Double.NaN, 1)).isEqualTo("-");
-    }
-
     @Test
     void whatIsNotKnownIsADashNeverZero() {
         assertThat(Figures.shown(Double.NaN)).isEqualTo("-");
         assertThat(Figures.percent(Double.NaN)).isEqualTo("-");
         assertThat(Figures.typeset(Double.NaN)).isEqualTo("–");
+    }
+
+    /** A sum of terms of about 1000 is exact to 1e-9 at best. */
+    @Test
+    void roundingIsTakenAway() {
+        assertThat(Figures.withoutRounding(1.7e-18, 1e3)).isZero();
+        assertThat(Figures.withoutRounding(-9e-10, 1e3)).isZero();
+        assertThat(Figures.withoutRounding(-2e-9, 1e3)).isEqualTo(-2e-9);
+        assertThat(Figures.withoutRounding(1.7e-18, 1e-17)).isEqualTo(1.7e-18);
+        assertThat(Figures.withoutRounding(1.7e-18, 0)).isEqualTo(1.7e-18);
+        assertThat(Figures.withoutRounding(Double.NaN, 1)).isNaN();
     }
 
     @Test
