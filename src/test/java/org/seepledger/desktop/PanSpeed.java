@@ -1,13 +1,15 @@
 package org.seepledger.desktop;
 
 import java.nio.file.Path;
-import java.util.Arrays;
+import java.util.concurrent.TimeUnit;
+import javafx.animation.AnimationTimer;
 import org.seepledger.job.MapQuantity;
+import org.testfx.util.WaitForAsyncUtils;
 
 /** Measures how long a frame takes while a large layer is panned and zoomed: the folder is the argument. */
 public final class PanSpeed {
 
-    private static final int FRAMES = 120;
+    private static final int SECONDS = 3;
 
     private PanSpeed() {}
 
@@ -50,21 +52,22 @@ public final class PanSpeed {
         System.out.printf("%s in %.0f ms%n", kind, (System.nanoTime() - begin) / 1e6);
     }
 
+    /** Moves the map in every frame that the toolkit gives, and counts them. */
     private static void frames(OpenWindow window, String what, double factor) {
-        double[] times = new double[FRAMES];
-        for (int i = 0; i < FRAMES; i++) {
-            double way = i < FRAMES / 2 ? 9 : -9;
-            long begin = System.nanoTime();
-            window.robot.interact(() -> {
+        int[] frames = new int[1];
+        AnimationTimer timer = new AnimationTimer() {
+            @Override
+            public void handle(long now) {
+                double way = frames[0]++ % 60 < 30 ? 9 : -9;
                 window.assembly().map().drag(way, way / 2);
-                window.assembly().map().zoom(500, 300, factor);
-                window.assembly().scene().getRoot().layout();
-            });
-            times[i] = (System.nanoTime() - begin) / 1e6;
-        }
-        Arrays.sort(times);
-        System.out.printf(
-                "%s: median %.1f ms, 95 %% %.1f ms, worst %.1f ms on the window's thread%n",
-                what, times[FRAMES / 2], times[FRAMES * 95 / 100], times[FRAMES - 1]);
+                window.assembly().map().zoom(500, 300, way > 0 ? factor : 1 / factor);
+            }
+        };
+        long begin = System.nanoTime();
+        window.robot.interact(timer::start);
+        WaitForAsyncUtils.sleep(SECONDS, TimeUnit.SECONDS);
+        window.robot.interact(timer::stop);
+        double seconds = (System.nanoTime() - begin) / 1e9;
+        System.out.printf("%s: %.0f frames a second%n", what, frames[0] / seconds);
     }
 }
