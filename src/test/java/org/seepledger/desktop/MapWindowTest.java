@@ -99,7 +99,7 @@ class MapWindowTest {
 
     @Test
     void theCursorsPlaceAndValueAreReadOutAndNothingJumps() {
-        window.robot.moveTo(onScreen(620, 300));
+        window.robot.moveTo(onScreen(330, 260));
         Label value = window.robot.lookup("#readout-value").queryAs(Label.class);
         window.await(() -> value.getText().startsWith("head "));
         double left = value.getLayoutX();

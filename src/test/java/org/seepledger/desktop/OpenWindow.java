@@ -71,7 +71,7 @@ public final class OpenWindow implements AutoCloseable {
 
     /** Lets the window come to rest. */
     void settle() {
-        WaitForAsyncUtils.sleep(600, TimeUnit.MILLISECONDS);
+        WaitForAsyncUtils.sleep(350, TimeUnit.MILLISECONDS);
         WaitForAsyncUtils.waitForFxEvents();
     }
 

@@ -1,5 +1,6 @@
 package org.seepledger.desktop.draw;
 
+import java.util.List;
 import java.util.Optional;
 import org.seepledger.desktop.map.Aim;
 import org.seepledger.desktop.map.Touch;
@@ -32,11 +33,17 @@ final class SelectHand {
         this.snapper = snapper;
     }
 
+    /** Vertices and sides of the selected prism come first, since neighbours share them; others show no vertices. */
     private Optional<Hit> at(Touch touch) {
-        Optional<String> preferred = model.selected().map(Shape::name);
         Place pointer = new Place(touch.x(), touch.y());
-        return Hit.at(model.drawing(), pointer, Nearness.ofPixel(touch.pixel()), preferred)
-                .filter(hit -> !(hit instanceof Hit.Vertex) || preferred.equals(Optional.of(hit.shape())));
+        Nearness near = Nearness.ofPixel(touch.pixel());
+        Optional<String> preferred = model.selected().map(Shape::name);
+        return model.selected()
+                .map(shape -> new Drawing(List.of(shape)))
+                .flatMap(own -> Hit.at(own, pointer, near, preferred))
+                .filter(hit -> !(hit instanceof Hit.Body))
+                .or(() ->
+                        Hit.at(model.drawing(), pointer, near, preferred).filter(hit -> !(hit instanceof Hit.Vertex)));
     }
 
     Aim aim() {

@@ -33,11 +33,7 @@ final class FluxArrows {
                 double size = Math.hypot(alongX, alongY);
                 double x = x(grid, camera, east, row, column);
                 double y = y(grid, camera, east, row, column);
-                if (size > 0
-                        && x > -LONGEST
-                        && y > -LONGEST
-                        && x < camera.width() + LONGEST
-                        && y < camera.height() + LONGEST) {
+                if (size > 0 && OnScreen.isNear(x, y, camera)) {
                     double half = (SHORTEST + (LONGEST - SHORTEST) * Math.sqrt(size / greatest)) / 2;
                     double dx = alongX / size * half;
                     double dy = -alongY / size * half;

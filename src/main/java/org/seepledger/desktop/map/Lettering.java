@@ -46,8 +46,9 @@ final class Lettering {
             }
         }
         if (model.overlays().wells().get()) {
-            model.wells().get().forEach(lettering::keepFree);
-            model.wells().get().forEach(lettering::well);
+            List<WellPlace> near = lettering.nearWells();
+            near.forEach(lettering::keepFree);
+            near.forEach(lettering::well);
         }
         model.contours().lines().get().forEach(lettering::contour);
         return lettering.marks;
@@ -77,6 +78,12 @@ final class Lettering {
 
     private static Mark.Text text(double x, double y, String words, Mark.Anchor anchor, boolean bold) {
         return new Mark.Text(x, y, words, bold ? 13 : 12, anchor, Ink.Token.PRISM, bold, true, 0);
+    }
+
+    private List<WellPlace> nearWells() {
+        return model.wells().get().stream()
+                .filter(well -> OnScreen.isNear(camera.x(well.x()), camera.y(well.y()), camera))
+                .toList();
     }
 
     private void keepFree(WellPlace well) {
@@ -114,7 +121,8 @@ final class Lettering {
             double walked = 0;
             for (int i = 2; i < line.length; i += 2) {
                 walked += Math.hypot(line[i] - line[i - 2], line[i + 1] - line[i - 1]) * camera.scale();
-                if (walked >= next && label(contour, line, i)) {
+                boolean near = walked >= next && OnScreen.isNear(camera.x(line[i]), camera.y(line[i + 1]), camera);
+                if (near && label(contour, line, i)) {
                     next = walked + EVERY;
                 }
             }

@@ -132,13 +132,11 @@ final class MapCanvas extends Region {
         List<Mark> marks = new ArrayList<>();
         for (ContourModel.Contour contour : model.contours().lines().get()) {
             for (double[] line : contour.lines()) {
-                double[] xy = new double[line.length];
-                for (int i = 0; i < xy.length; i += 2) {
-                    xy[i] = camera.x(line[i]);
-                    xy[i + 1] = camera.y(line[i + 1]);
+                double[] xy = OnScreen.thinned(line, camera);
+                if (xy.length > 2) {
+                    marks.add(new Mark.Line(xy, Mark.Stroke.of(Ink.Token.PAPER, 2.2)));
+                    marks.add(new Mark.Line(xy, Mark.Stroke.of(Ink.Token.TEXT, 0.9)));
                 }
-                marks.add(new Mark.Line(xy, Mark.Stroke.of(Ink.Token.PAPER, 2.2)));
-                marks.add(new Mark.Line(xy, Mark.Stroke.of(Ink.Token.TEXT, 0.9)));
             }
         }
         return marks;

@@ -66,6 +66,8 @@ public final class StatePane extends StackPane {
     private void show(PaneState shown) {
         patience.stop();
         if (shown.phase() == PaneState.Phase.WORKING) {
+            content.setVisible(true);
+            notice(shown, false, false, false);
             patience.playFromStart();
             return;
         }

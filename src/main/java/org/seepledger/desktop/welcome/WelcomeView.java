@@ -8,6 +8,7 @@ import javafx.scene.Node;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
+import javafx.scene.control.Tooltip;
 import javafx.scene.input.DragEvent;
 import javafx.scene.input.TransferMode;
 import javafx.scene.layout.HBox;
@@ -111,19 +112,19 @@ public final class WelcomeView extends StackPane {
     }
 
     private Button card(Place place) {
+        Button card = new Button();
         Label title = new Label(place.title());
         title.getStyleClass().add("sl-name");
         VBox words = new VBox(3, title);
         if (!place.lead().isEmpty()) {
             Label lead = new Label(place.lead());
-            lead.setWrapText(true);
-            lead.setPrefWidth(CARD_WIDTH);
+            lead.setMaxWidth(CARD_WIDTH);
+            card.setTooltip(new Tooltip(place.lead()));
             words.getChildren().add(lead);
         }
         Label where = new Label(place.folder().toString());
         where.getStyleClass().add("sl-small");
         words.getChildren().add(where);
-        Button card = new Button();
         card.setGraphic(words);
         card.setAccessibleText(place.title());
         card.getStyleClass().setAll("sl-card");
