@@ -37,9 +37,9 @@ final class ClosureWords {
         List<String> sentences = new ArrayList<>();
         sentences.add(overTheRecord());
         result.worstPeriod()
-                .ifPresent(
-                        worst -> sentences.add("Worst period: " + worst.period().name() + ", "
-                                + wording.percent(Figures.withoutRounding(worst.totals().closureError(), 100)) + "."));
+                .ifPresent(worst -> sentences.add("Worst period: "
+                        + worst.period().name() + ", "
+                        + wording.percent(Figures.withoutRounding(worst.totals().closureError(), 100)) + "."));
         return sentences;
     }
 

@@ -43,7 +43,8 @@ final class DominanceWords {
                         + wording.percent(100 * volume.applyAsDouble(term) / all) + ")")
                 .toList();
         boolean stored = terms.stream().anyMatch(term -> term.group() == Group.STORAGE);
-        sentences.add("Of all " + what + (stored ? ", " + storage + " storage among them, " : ", ") + wording.rate(all, time) + " gross, the largest "
-                + (largest.size() == 1 ? "is " : "are ") + Wording.listed(largest) + ".");
+        sentences.add("Of all " + what + (stored ? ", " + storage + " storage among them, " : ", ")
+                + wording.rate(all, time) + " gross, the largest " + (largest.size() == 1 ? "is " : "are ")
+                + Wording.listed(largest) + ".");
     }
 }

@@ -135,7 +135,10 @@ public final class SvgWriter {
 
     private void write(Mark.Area area) throws XMLStreamException {
         Optional<Mark.Fill> textured = area.fill().filter(fill -> fill.texture() != Mark.Texture.PLAIN);
-        writeRings(area, textured.map(SvgWriter::ground).or(area::fill), textured.isPresent() ? Optional.empty() : area.stroke());
+        writeRings(
+                area,
+                textured.map(SvgWriter::ground).or(area::fill),
+                textured.isPresent() ? Optional.empty() : area.stroke());
         if (textured.isPresent()) {
             writeHatch(area, textured.get());
             if (area.stroke().isPresent()) {
@@ -174,7 +177,10 @@ public final class SvgWriter {
             if (fill.opacity() < 1) {
                 xml.writeAttribute("stroke-opacity", number(fill.opacity()));
             }
-            new Paint().empty().outline(Mark.Stroke.of(fill.ink(), dots ? DOT : LINE)).write();
+            new Paint()
+                    .empty()
+                    .outline(Mark.Stroke.of(fill.ink(), dots ? DOT : LINE))
+                    .write();
         }
     }
 
