@@ -170,6 +170,9 @@ final class BlockSheet {
 
     /** Marks where a leader begins that passes over another piece. */
     private double dot(Drawn one) {
+        if (Math.abs(y(one.piece().from()) - y(one.piece().to())) < 8) {
+            return one.x() + 1;
+        }
         double x = one.x() - 6;
         Box dot = new Box(x - 2, one.y() - 2, 4, 4);
         marks.add(Mark.Area.of(dot, Fill.of(Ink.Token.TEXT)));

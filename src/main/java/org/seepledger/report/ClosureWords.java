@@ -63,8 +63,8 @@ final class ClosureWords {
         if (through >= THROUGH_FLOW * totals.throughput()) {
             sentences.add("Of that throughput, "
                     + wording.percent(100 * through / totals.throughput())
-                    + " goes in and out through the same items or at different times, and would be less or more if sides"
-                    + " were drawn otherwise. Set against net flow, the closure error does not depend on it.");
+                    + " goes in and out again through the same items, at other places or times; for sides, how much depends"
+                    + " on how they are drawn. The closure error set against net flow leaves it out.");
         }
     }
 }

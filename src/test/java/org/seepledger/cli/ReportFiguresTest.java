@@ -22,6 +22,9 @@ import org.w3c.dom.Element;
 /** The numbers of {@code report.html} are those of {@code budget.csv}, to the last bit, and shown as they round. */
 class ReportFiguresTest {
 
+    private static final List<String> TOTALS =
+            List.of("inflow", "outflow", "storage change", "residual", "closure error", "net closure error");
+
     private static final long LARGEST = 5_000_000;
 
     @TempDir
@@ -153,25 +156,40 @@ class ReportFiguresTest {
     @Test
     void totalsByPeriodAreThoseOfTheTable() {
         Budget budget = Budget.of(monthly);
-        List<String> totals =
-                List.of("inflow", "outflow", "storage change", "residual", "closure error", "net closure error");
         for (Element table : ReportHtml.of(monthly).ofClass("periods")) {
             List<Element> rows = ReportHtml.within(table, "tr").stream()
                     .filter(row -> row.hasAttribute("data-period"))
                     .toList();
             assertThat(rows).hasSize(24);
             for (Element row : rows) {
-                for (int i = 0; i < totals.size(); i++) {
+                for (int i = 0; i < TOTALS.size(); i++) {
                     String key = String.join(
                             "/",
                             table.getAttribute("data-prism"),
                             row.getAttribute("data-period"),
                             "total",
-                            totals.get(i),
+                            TOTALS.get(i),
                             "*");
                     assertCell(
                             ReportHtml.cells(row).get(i + 1), csv(budget, key).get("net_rate"), i >= 4);
                 }
+            }
+        }
+    }
+
+    @Test
+    void totalsOfAllPrismsAreThoseOfTheTable() {
+        Budget budget = Budget.of(whole);
+        List<Element> rows = ReportHtml.within(
+                        ReportHtml.of(whole).ofClass("glance").get(0), "tr")
+                .stream()
+                .filter(row -> row.hasAttribute("data-prism"))
+                .toList();
+        assertThat(rows).hasSize(4);
+        for (Element row : rows) {
+            for (int i = 0; i < TOTALS.size(); i++) {
+                CSVRecord csv = csv(budget, row.getAttribute("data-prism") + "/record/total/" + TOTALS.get(i) + "/*");
+                assertCell(ReportHtml.cells(row).get(i), csv.get(i >= 4 ? "net_rate" : "net_volume"), i >= 4);
             }
         }
     }

@@ -95,9 +95,9 @@ class AnswerTest {
         assertThat(says(Topic.CLOSURE))
                 .containsExactly(
                         "Closure error 5.00 % of throughput (12.50 % of net flow): 5 m3/d of 100 m3/d is unexplained.",
-                        "Of that throughput, 60.00 % goes in and out through the same items or at different times, and would"
-                                + " be less or more if sides were drawn otherwise. Set against net flow, the closure error does"
-                                + " not depend on it.");
+                        "Of that throughput, 60.00 % goes in and out again through the same items, at other places or"
+                                + " times; for sides, how much depends on how they are drawn. The closure error set against"
+                                + " net flow leaves it out.");
         assertThat(says(Topic.LIMITS)).last().asString().startsWith("A small closure error would not prove");
     }
 

@@ -15,6 +15,17 @@ class FiguresTest {
         assertThat(Figures.shown(-0.0)).isEqualTo("0");
     }
 
+    /** A sum of terms of about 1000 is exact to 1e-9 at best. */
+    @Test
+    void roundingIsZeroBesideWhatItCameFrom() {
+        assertThat(Figures.shown(1.7e-18, 1e3)).isEqualTo("0");
+        assertThat(Figures.shown(-9e-10, 1e3)).isEqualTo("0");
+        assertThat(Figures.shown(-2e-9, 1e3)).isEqualTo("-2.000e-09");
+        assertThat(Figures.shown(1.7e-18, 1e-17)).isEqualTo("1.700e-18");
+        assertThat(Figures.shown(1.7e-18, 0)).isEqualTo("1.700e-18");
+        assertThat(Figures.shown(Double.NaN, 1)).isEqualTo("-");
+    }
+
     @Test
     void whatIsNotKnownIsADashNeverZero() {
         assertThat(Figures.shown(Double.NaN)).isEqualTo("-");

@@ -50,7 +50,7 @@ final class BudgetTable {
 
     private DomContent write() {
         List<Term> folded = folded();
-        String title = prism + ": " + budget.period().name() + ", " + amounts();
+        String title = prism + ": " + budget.period().name() + ", " + report.amountsAndUnit();
         List<DomContent> bodies = new ArrayList<>();
         for (Group group : List.of(Group.SIDE, Group.LID, Group.SOURCE, Group.STORAGE)) {
             List<Term> terms = Term.of(budget).stream()
@@ -62,10 +62,6 @@ final class BudgetTable {
         }
         bodies.add(totals());
         return div(Cells.scrolling(title, framed(title, bodies)), folded.isEmpty() ? text("") : fold(folded));
-    }
-
-    private String amounts() {
-        return (report.amounts() == Amounts.RATE ? "mean rates in " : "volumes in ") + report.amountUnit();
     }
 
     private TableTag framed(String title, List<DomContent> bodies) {
@@ -130,7 +126,7 @@ final class BudgetTable {
     }
 
     private DomContent fold(List<Term> folded) {
-        String title = prism + ": " + budget.period().name() + ", the smaller sides, " + amounts();
+        String title = prism + ": " + budget.period().name() + ", the smaller sides, " + report.amountsAndUnit();
         DomContent body =
                 tbody(folded.stream().flatMap(term -> rows.of(term).stream()).toArray(DomContent[]::new));
         return details(

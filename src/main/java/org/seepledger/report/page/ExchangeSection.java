@@ -34,8 +34,7 @@ final class ExchangeSection {
     }
 
     private static DomContent flows(Report report) {
-        String title = "Exchange: record, " + (report.amounts() == Amounts.RATE ? "mean rates in " : "volumes in ")
-                + report.amountUnit();
+        String title = "Exchange: record, " + report.amountsAndUnit();
         List<ExchangeFlow> flows = report.exchange().stream()
                 .filter(flow -> flow.volume(report.record()) != 0)
                 .toList();

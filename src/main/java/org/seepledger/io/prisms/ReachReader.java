@@ -2,31 +2,24 @@ package org.seepledger.io.prisms;
 
 import com.fasterxml.jackson.databind.JsonNode;
 import java.util.Optional;
-import org.seepledger.aquifer.GriddedValues;
-import org.seepledger.io.DataFolder;
-import org.seepledger.prism.VerticalRange;
+import org.seepledger.sketch.Limit;
+import org.seepledger.sketch.Reach;
 
 /** Reads how far a prism reaches: {@code layers}, or {@code top} and {@code bottom}, or neither for all layers. */
-final class VerticalRangeReader {
+final class ReachReader {
 
     private final int layers;
-    private final DataFolder folder;
-    private final SurfaceReader surfaces;
 
     /**
-     * Reads ranges of one file.
+     * Reads ranges.
      *
      * @param layers the number of layers of the grid
-     * @param folder the file's folder
-     * @param surfaces reads rasters in it
      */
-    VerticalRangeReader(int layers, DataFolder folder, SurfaceReader surfaces) {
+    ReachReader(int layers) {
         this.layers = layers;
-        this.folder = folder;
-        this.surfaces = surfaces;
     }
 
-    VerticalRange read(JsonNode properties, Spot spot) {
+    Reach read(JsonNode properties, Spot spot) {
         JsonNode stack = properties.path("layers");
         JsonNode top = properties.path("top");
         JsonNode bottom = properties.path("bottom");
@@ -38,7 +31,7 @@ final class VerticalRangeReader {
                     "Take out layers, or top and bottom.");
         }
         if (!elevations) {
-            return isGiven(stack) ? stack(stack, spot.in("layers")) : new VerticalRange.Layers(0, layers - 1);
+            return isGiven(stack) ? stack(stack, spot.in("layers")) : new Reach.Whole();
         }
         if (top.isNumber() && bottom.isNumber() && !(top.doubleValue() > bottom.doubleValue())) {
             throw spot.fault(
@@ -46,7 +39,7 @@ final class VerticalRangeReader {
                     "a top above the bottom",
                     "Correct the elevations.");
         }
-        return new VerticalRange.Elevations(surface(top, spot.in("top")), surface(bottom, spot.in("bottom")));
+        return new Reach.Between(limit(top, spot.in("top")), limit(bottom, spot.in("bottom")));
     }
 
     /** Geographic information systems write null for a field that a feature lacks. */
@@ -54,7 +47,7 @@ final class VerticalRangeReader {
         return !value.isMissingNode() && !value.isNull();
     }
 
-    private VerticalRange stack(JsonNode stack, Spot spot) {
+    private Reach stack(JsonNode stack, Spot spot) {
         boolean pair = stack.isArray() && stack.size() == 2 && isLayer(stack.get(0)) && isLayer(stack.get(1));
         if (!pair || stack.get(0).intValue() > stack.get(1).intValue()) {
             throw spot.fault(
@@ -62,8 +55,7 @@ final class VerticalRangeReader {
                     "[first, last], two whole numbers from 1 to " + layers + " counted from the top down",
                     "Write, for instance, [1, " + layers + "].");
         }
-        return new VerticalRange.Layers(
-                stack.get(0).intValue() - 1, stack.get(1).intValue() - 1);
+        return new Reach.Layers(stack.get(0).intValue() - 1, stack.get(1).intValue() - 1);
     }
 
     private boolean isLayer(JsonNode number) {
@@ -73,12 +65,12 @@ final class VerticalRangeReader {
                 && number.doubleValue() <= layers;
     }
 
-    private Optional<GriddedValues> surface(JsonNode value, Spot spot) {
+    private static Optional<Limit> limit(JsonNode value, Spot spot) {
         if (!isGiven(value)) {
             return Optional.empty();
         }
         if (value.isNumber() && Double.isFinite(value.doubleValue())) {
-            return Optional.of(GriddedValues.constant(value.doubleValue()));
+            return Optional.of(new Limit.Elevation(value.doubleValue()));
         }
         if (!value.isTextual()) {
             throw spot.fault(
@@ -86,7 +78,6 @@ final class VerticalRangeReader {
                     "an elevation, or the path of a surface raster",
                     "Write a number, a path, or leave it out for the grid's own.");
         }
-        String path = value.textValue();
-        return Optional.of(surfaces.read(folder.resolve(path, spot.place()), path));
+        return Optional.of(new Limit.Surface(value.textValue()));
     }
 }
