@@ -144,7 +144,7 @@ public final class LedgerModel {
 
     /** Copies the rows with their units, in full precision. */
     public void copy() {
-        if (!rows.isEmpty()) {
+        if (!rows.isEmpty() && !belongs.get().isEmpty()) {
             LedgerCopy copy = new LedgerCopy(belongs.get(), unit.get(), rows);
             copies.table(copy.tabSeparated(), copy.html());
             session.status().set(Words.of("ledger.copied", belongs.get()));
