@@ -133,6 +133,24 @@ public final class WaterBalance {
                 .map(rows -> new Band(aquifer.times(), known, span, rows, prisms, contacts, wells, imbalance))
                 .toList();
         progress.begin("balancing", (long) bands.size() * span.count());
+        BandResult total = threads == 1 ? oneByOne(bands, progress) : atOnce(bands, threads, progress);
+        return new Balance(
+                ledgers(total),
+                prisms.stream().map(PrismAccounts::cut).toList(),
+                new ExchangeSheet(aquifer.times().intervals(), span, prisms, contacts, overlaps, total).flows(),
+                imbalance,
+                prisms.stream().map(prism -> Whereabouts.of(prism, imbalance)).toList(),
+                RunNotes.of(aquifer, span, prisms, overlaps, total));
+    }
+
+    /** In the caller's own thread: to wait for another one costs time where answers are wanted many times a second. */
+    private BandResult oneByOne(List<Band> bands, Progress progress) {
+        BandResult total = new BandResult(prisms, contacts, span);
+        bands.forEach(band -> total.add(band.work(progress)));
+        return total;
+    }
+
+    private BandResult atOnce(List<Band> bands, int threads, Progress progress) {
         BandResult total = new BandResult(prisms, contacts, span);
         ExecutorService workers = Executors.newFixedThreadPool(threads, WaterBalance::daemon);
         try {
@@ -154,13 +172,7 @@ public final class WaterBalance {
         } finally {
             workers.shutdownNow();
         }
-        return new Balance(
-                ledgers(total),
-                prisms.stream().map(PrismAccounts::cut).toList(),
-                new ExchangeSheet(aquifer.times().intervals(), span, prisms, contacts, overlaps, total).flows(),
-                imbalance,
-                prisms.stream().map(prism -> Whereabouts.of(prism, imbalance)).toList(),
-                RunNotes.of(aquifer, span, prisms, overlaps, total));
+        return total;
     }
 
     private static Thread daemon(Runnable work) {

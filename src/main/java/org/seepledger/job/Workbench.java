@@ -202,8 +202,8 @@ public final class Workbench implements AutoCloseable {
     private IntervalBudget budget(Prism prism, int interval, Progress progress) {
         List<String> notes = new ArrayList<>();
         List<Prism> admitted = List.of(reader(notes::add).admitted(prism));
-        Balance balance = WaterBalance.of(
-                aquifer(), kept::around, Span.only(interval), admitted, WellRule.POINT, threads(), progress);
+        Balance balance =
+                WaterBalance.of(aquifer(), kept::around, Span.only(interval), admitted, WellRule.POINT, 1, progress);
         Period period = periods(Periods.Every.INTERVAL, 1).get(interval);
         PeriodBudget budget = balance.ledgers().get(0).budget(period);
         double area = balance.cuts().get(0).area();

@@ -6,7 +6,8 @@ import java.util.List;
 /**
  * An outline or line while it is drawn, place by place.
  *
- * <p>The second press of a double-click is where the first was, and adds nothing; so is a place typed twice.
+ * <p>The second press of a double-click lies within the reach of a drag from the first, and adds nothing; nor does a place
+ * typed twice.
  *
  * @param places the places so far, none the same as the one before
  */
@@ -32,6 +33,18 @@ public record Stroke(List<Place> places) {
         List<Place> more = new ArrayList<>(places);
         more.add(place);
         return new Stroke(more);
+    }
+
+    /**
+     * {@return the stroke with another place, unless that is no farther from its end than a press may wander before it is
+     * a drag}
+     *
+     * @param place the place that was pressed
+     * @param nearness how near counts
+     */
+    public Stroke to(Place place, Nearness nearness) {
+        boolean again = !places.isEmpty() && !nearness.isDrag(places.get(places.size() - 1), place);
+        return again ? this : to(place);
     }
 
     /** {@return the stroke with more places} */

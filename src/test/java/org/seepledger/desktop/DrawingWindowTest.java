@@ -92,7 +92,8 @@ class DrawingWindowTest {
     void aPrismDrawnByHandHasTheBudgetThatTheCommandGivesForItsFileDigitForDigit() {
         drawPrism();
         assertThat(drawing().outline(RingAt.outer("prism")).size()).isEqualTo(4);
-        assertThat(window.robot.lookup("#status").queryAs(Label.class).getText()).contains("Click a prism");
+        assertThat(window.robot.lookup("#status").queryAs(Label.class).getText())
+                .contains("Click a prism");
         window.await(() -> window.assembly().session().faceFlows().get().prism().equals("prism"));
         FaceFlows shown = window.assembly().session().faceFlows().get();
         Path file = folder.resolve("drawn.geojson");
@@ -176,7 +177,8 @@ class DrawingWindowTest {
         window = new OpenWindow(1600, 1000);
         openSet();
         assertThat(drawing()).isEqualTo(drawn);
-        assertThat(window.robot.lookup("#status").queryAs(Label.class).getText()).contains("are back");
+        assertThat(window.robot.lookup("#status").queryAs(Label.class).getText())
+                .contains("are back");
     }
 
     @Test

@@ -86,17 +86,4 @@ class FigureTest {
         assertThatThrownBy(() -> Buffer.of(field, -60)).hasMessageContaining("Nothing would be left");
         assertThatThrownBy(() -> Buffer.of(field, 0)).isInstanceOf(Refusal.class);
     }
-
-    @Test
-    void aStrokeBecomesAnOutline() {
-        Place second = WELL.moved(10, 0);
-        Stroke stroke = Stroke.EMPTY.to(WELL).to(second).to(second);
-        assertThat(stroke.places()).containsExactly(WELL, second);
-        assertThatThrownBy(stroke::closed).isInstanceOf(Refusal.class);
-        Stroke three = stroke.to(WELL.moved(0, 10));
-        assertThat(three.to(WELL.moved(0, 10)).closed().size()).isEqualTo(3);
-        assertThat(three.back()).isEqualTo(stroke);
-        assertThat(Stroke.EMPTY.back()).isSameAs(Stroke.EMPTY);
-        assertThat(three.to(WELL).closed().size()).isEqualTo(3);
-    }
 }

@@ -42,8 +42,8 @@ final class SelectHand {
                 .map(shape -> new Drawing(List.of(shape)))
                 .flatMap(own -> Hit.at(own, pointer, near, preferred))
                 .filter(hit -> !(hit instanceof Hit.Body))
-                .or(() -> Hit.at(model.drawing(), pointer, near, preferred)
-                        .filter(hit -> !(hit instanceof Hit.Vertex)));
+                .or(() ->
+                        Hit.at(model.drawing(), pointer, near, preferred).filter(hit -> !(hit instanceof Hit.Vertex)));
     }
 
     Aim aim() {

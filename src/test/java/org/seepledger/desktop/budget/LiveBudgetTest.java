@@ -34,9 +34,7 @@ class LiveBudgetTest {
     void open() {
         Opening opening = Opening.of(Path.of("sample-aquifers/valley"));
         set = opening.set();
-        prisms = set.workbench()
-                .read(Path.of("sample-aquifers/valley/prisms.geojson"))
-                .prisms();
+        prisms = set.workbench().read(set.path().resolve(Opening.PRISMS)).prisms();
     }
 
     @AfterEach
