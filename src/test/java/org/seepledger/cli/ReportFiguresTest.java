@@ -124,7 +124,7 @@ class ReportFiguresTest {
     private static void assertCell(Element cell, String csv, boolean percent) {
         double value = csv.isEmpty() ? Double.NaN : Double.parseDouble(csv);
         assertThat(ReportHtml.number(cell)).isEqualTo(value);
-        assertThat(cell.getTextContent()).isEqualTo(percent ? Figures.typesetPercent(value) : Figures.typeset(value));
+        assertThat(cell.getTextContent()).isEqualTo(percent ? Figures.typesetPercent(value) : Figures.tabular(value));
     }
 
     @Test

@@ -262,6 +262,14 @@ class ReportPageTest {
                 .containsExactly("interval 1", "interval 2");
     }
 
+    @Test
+    void theRecordStandsInWhereNoPeriodIsTheWorst() {
+        ReportHtml report = report(new AquiferFiles(folder).with("times", "[0, 10]"), "--report-periods", "worst");
+        assertThat(report.ofClass("budget"))
+                .extracting(table -> table.getAttribute("data-period"))
+                .containsExactly("record");
+    }
+
     @ParameterizedTest
     @CsvSource(
             delimiter = ';',

@@ -22,7 +22,7 @@ final class Cells {
 
     /** A number to four digits, with all its digits beside it; a dash where it cannot be given. */
     static TdTag number(double value) {
-        return number(value, Figures::typeset);
+        return number(value, Figures::tabular);
     }
 
     /** A percentage, in the same way. */
