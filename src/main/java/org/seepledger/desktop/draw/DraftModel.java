@@ -180,7 +180,8 @@ public final class DraftModel {
         if (!shapes.isEmpty()) {
             int place = selected().map(shapes::indexOf).orElse(by > 0 ? -1 : 0);
             session.lit().set("");
-            session.selected().set(shapes.get(Math.floorMod(place + by, shapes.size())).name());
+            session.selected()
+                    .set(shapes.get(Math.floorMod(place + by, shapes.size())).name());
         }
     }
 
