@@ -45,10 +45,13 @@ public final class MapView extends BorderPane {
         setId("map");
         canvas.setId("map-canvas");
         canvas.setFocusTraversable(true);
-        canvas.getStyleClass().add("sl-map");
         Legend legend = new Legend(model.values(), theme);
         LayerColumn layers = new LayerColumn(model.session());
-        StackPane stack = new StackPane(canvas, legend, layers, tray);
+        Region ring = new Region();
+        ring.getStyleClass().add("sl-ring");
+        ring.setMouseTransparent(true);
+        ring.visibleProperty().bind(canvas.focusedProperty());
+        StackPane stack = new StackPane(canvas, ring, legend, layers, tray);
         canvas.invite(hand::marks);
         StackPane.setAlignment(legend, Pos.BOTTOM_RIGHT);
         StackPane.setAlignment(layers, Pos.TOP_LEFT);
