@@ -122,9 +122,9 @@ public final class BalanceSummary {
         HotSpots.append(text, aquifer.grid(), where.largest(), unit, units.rateFactor(), throughput);
     }
 
-    /** A mean rate over the record; rounding of the terms that make the throughput is shown as 0. */
+    /** A rate over the record; rounding of the terms that make the throughput counts as 0. */
     private String rate(double volume, PeriodBudget record) {
-        double significant = Figures.withoutRounding(volume, record.totals().throughput());
-        return Figures.shown(significant / record.period().duration() * units.rateFactor());
+        double factor = units.rateFactor() / record.period().duration();
+        return Figures.shown(volume * factor, record.totals().throughput() * factor);
     }
 }

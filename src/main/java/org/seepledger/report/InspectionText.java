@@ -155,7 +155,7 @@ public final class InspectionText {
         facts.fact("throughput", Figures.shown(throughput) + " " + rateUnit);
         facts.fact(
                 "residual",
-                Figures.shown(Figures.withoutRounding(totals.residual() / time, throughput)) + " " + rateUnit + ", "
+                Figures.shown(totals.residual() / time, throughput) + " " + rateUnit + ", "
                         + Figures.percent(totals.closureError()) + " of throughput");
         facts.fact(
                 "cell imbalance",

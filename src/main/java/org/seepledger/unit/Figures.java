@@ -44,6 +44,16 @@ public final class Figures {
     }
 
     /**
+     * {@return a number as {@link #shown(double)}, but 0 where it is nothing but rounding}
+     *
+     * @param value the number
+     * @param scale the magnitude of the numbers that it was reckoned from
+     */
+    public static String shown(double value, double scale) {
+        return shown(withoutRounding(value, scale));
+    }
+
+    /**
      * {@return a number, but 0 where it is nothing but rounding}
      *
      * @param value the number
