@@ -121,6 +121,9 @@ class FolioTest {
         window.await(() -> text("#ledger-belongs").contains("record, 2021-10-01 to 2023-10-01"));
         window.robot.clickOn("#ledger-copy");
         assertThat(window.answers.copied.get(0)).contains("\tL/s").startsWith("well field");
+        choose("#ledger-period", Periods.Every.WATER_YEAR);
+        choose("#ledger-month", 4);
+        window.await(() -> text("#ledger-belongs").contains("water year 2022, 2021-10-01 to 2022-04-01"));
     }
 
     @Test

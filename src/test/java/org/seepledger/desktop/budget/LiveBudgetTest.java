@@ -158,6 +158,7 @@ class LiveBudgetTest {
 
     @Test
     void whatCannotBeBalancedIsSaidInWordsAndMendedByTheNextDrawing() {
+        new FaceFeed(session, live, reading).begin();
         show();
         tasks.all();
         draw(moved(1e6), true);
@@ -165,10 +166,12 @@ class LiveBudgetTest {
         assertThat(live.now().get().phase()).isEqualTo(Phase.FAILED);
         assertThat(live.now().get().words()).contains("well field", "outside the grid");
         assertThat(live.record().get().phase()).isEqualTo(Phase.FAILED);
+        assertThat(session.faceFlows().get()).isEqualTo(FaceFlows.NONE);
         draw(prisms, true);
         tasks.all();
         assertThat(live.now().get().phase()).isEqualTo(Phase.READY);
         assertThat(live.record().get().phase()).isEqualTo(Phase.READY);
+        assertThat(session.faceFlows().get().prism()).isEqualTo("well field");
     }
 
     @Test
