@@ -164,7 +164,7 @@ public final class Workbench implements AutoCloseable {
      * @throws org.seepledger.fault.DataFault if it cannot be read, or lies in another system
      */
     public GroundPicture ground(Path file, Progress progress) {
-        return ask(progress, until -> GroundPicture.read(file, crs(), until));
+        return gate.ask(progress, until -> GroundPicture.read(file, crs(), until));
     }
 
     /**
