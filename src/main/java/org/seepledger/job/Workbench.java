@@ -157,6 +157,17 @@ public final class Workbench implements AutoCloseable {
     }
 
     /**
+     * {@return a picture that lies under the map}
+     *
+     * @param file a GeoTIFF in the aquifer's coordinate system
+     * @param progress told how far the reading is
+     * @throws org.seepledger.fault.DataFault if it cannot be read, or lies in another system
+     */
+    public GroundPicture ground(Path file, Progress progress) {
+        return gate.ask(progress, until -> GroundPicture.read(file, crs(), until));
+    }
+
+    /**
      * Writes a drawing; the file appears whole or not at all.
      *
      * @param file the file, which is replaced if it exists
