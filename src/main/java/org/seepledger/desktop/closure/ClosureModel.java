@@ -105,15 +105,18 @@ public final class ClosureModel {
      * @param width in logical pixels
      */
     public Optional<Picture> blocks(double width) {
-        return session.set().get().flatMap(set -> session.selectedPrism().flatMap(prism -> live.whole()
+        return session.set()
                 .get()
-                .flatMap(record -> BudgetShown.whole(set, record, prism.name()))
-                .map(shown -> BudgetBlocks.of(
-                        prism.name(),
-                        shown.budget(),
-                        BudgetBlocks.Flows.NET,
-                        reading.shown(set),
-                        Math.max(300, width)))));
+                .flatMap(set -> session.selectedPrism()
+                        .flatMap(prism -> live.whole()
+                                .get()
+                                .flatMap(record -> BudgetShown.whole(set, record, prism.name()))
+                                .map(shown -> BudgetBlocks.of(
+                                        prism.name(),
+                                        shown.budget(),
+                                        BudgetBlocks.Flows.NET,
+                                        reading.shown(set),
+                                        Math.max(300, width)))));
     }
 
     /** Asks the map to show imbalance. */
