@@ -7,13 +7,9 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
-import java.time.LocalDate;
 import java.util.List;
-import java.util.Optional;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
-import org.seepledger.balance.Periods;
-import org.seepledger.balance.WellRule;
 import org.seepledger.fault.UsageFault;
 import org.seepledger.progress.Progress;
 
@@ -123,20 +119,7 @@ class ExtractJobTest {
     private List<String> budget(Path set, Path prisms, String name) throws IOException {
         Path out = folder.resolve(name);
         BalanceJob.run(
-                new BalanceRequest(
-                        set,
-                        prisms,
-                        out,
-                        Periods.Every.INTERVAL,
-                        Optional.empty(),
-                        10,
-                        Optional.empty(),
-                        Optional.empty(),
-                        WellRule.POINT,
-                        true,
-                        2,
-                        false,
-                        ReportRequest.dated(LocalDate.of(2024, 5, 31))),
+                Requests.byInterval(set, prisms, out),
                 Progress.NONE);
         return Rows.text(out.resolve("budget.csv"));
     }
