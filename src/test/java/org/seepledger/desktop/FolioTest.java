@@ -212,9 +212,7 @@ class FolioTest {
     private static List<String> commandsNets(Path folder, Prism prism, String period) throws IOException {
         Path prisms = folder.resolve("prisms.geojson");
         Files.writeString(prisms, geoJson(prism));
-        BalanceJob.run(
-                Requests.byInterval(VALLEY, prisms, folder.resolve("out")),
-                Progress.NONE);
+        BalanceJob.run(Requests.byInterval(VALLEY, prisms, folder.resolve("out")), Progress.NONE);
         return Files.readAllLines(folder.resolve("out/budget.csv")).stream()
                 .map(line -> line.split(",", -1))
                 .filter(cells -> cells.length == 17 && cells[1].equals(period) && !cells[6].equals("total"))

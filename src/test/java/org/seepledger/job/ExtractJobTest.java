@@ -118,9 +118,7 @@ class ExtractJobTest {
 
     private List<String> budget(Path set, Path prisms, String name) throws IOException {
         Path out = folder.resolve(name);
-        BalanceJob.run(
-                Requests.byInterval(set, prisms, out),
-                Progress.NONE);
+        BalanceJob.run(Requests.byInterval(set, prisms, out), Progress.NONE);
         return Rows.text(out.resolve("budget.csv"));
     }
 }

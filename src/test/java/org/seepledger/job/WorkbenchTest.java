@@ -68,9 +68,7 @@ class WorkbenchTest {
     private void assertCommandsNumbers(Path set) throws IOException {
         Path prisms = set.resolve("prisms.geojson");
         Path out = folder.resolve("out");
-        BalanceJob.run(
-                Requests.byInterval(set, prisms, out),
-                Progress.NONE);
+        BalanceJob.run(Requests.byInterval(set, prisms, out), Progress.NONE);
         try (Workbench bench = Workbench.open(set)) {
             List<Prism> drawn = bench.read(prisms).prisms();
             List<Period> periods = bench.periods(Periods.Every.INTERVAL, 1);
