@@ -120,6 +120,13 @@ class AnswerTest {
     }
 
     @Test
+    void whereNothingFlowsNothingIsProved() {
+        row(Group.SIDE, "side 1", 0, 0).row(Group.SIDE, "side 2", false, 0, 0);
+        assertThat(says(Topic.CLOSURE)).containsExactly("Nothing flows: there is nothing to close.");
+        assertThat(says(Topic.LIMITS)).containsExactly("No flow can be given for side 2; totals count it as 0.");
+    }
+
+    @Test
     void withoutStorageClosureIsNotJudged() {
         storage = StorageKnowledge.UNKNOWN;
         row(Group.SIDE, "side 1", 100, 0)
