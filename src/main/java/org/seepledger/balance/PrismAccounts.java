@@ -130,6 +130,8 @@ final class PrismAccounts {
     private void bookLids(Slab slab, int row, int column, double share, Bookings bookings) {
         if (!Double.isNaN(slab.top(row, column))) {
             bookings.throughFace(chart.top(slab.topLayer(row, column)), share * slab.upwardAtTop(row, column));
+        }
+        if (!Double.isNaN(slab.bottom(row, column))) {
             bookings.throughFace(
                     chart.bottom(slab.bottomLayer(row, column)), -share * slab.upwardAtBottom(row, column));
         }

@@ -25,10 +25,13 @@ interface Slab {
     /** The magnitudes that {@link #outflow} is made of, summed: what its rounding is measured against. */
     double gross(int layer, int row, int column);
 
-    /** The elevation of the prism's top at a column of cells, in length units; NaN where the range misses the column. */
+    /**
+     * The elevation of the prism's top at a column of cells, in length units; NaN where the range misses the column, or the
+     * uppermost cell's top is not known, through which nothing flows.
+     */
     double top(int row, int column);
 
-    /** The elevation of the prism's bottom at a column of cells; NaN where the range misses the column. */
+    /** The elevation of the prism's bottom at a column of cells; NaN as for the top. */
     double bottom(int row, int column);
 
     /** The layer in which the top lies; only where the range does not miss the column. */

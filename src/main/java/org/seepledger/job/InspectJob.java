@@ -46,6 +46,8 @@ public final class InspectJob {
             RunWarnings words = new RunWarnings(aquifer, balance.notes());
             List<String> warnings = new ArrayList<>(opened.warnings());
             warnings.addAll(Plausibility.doubts(ranges));
+            warnings.addAll(PorosityDoubts.of(aquifer, opened.solutes(), progress));
+            warnings.addAll(HeadDoubts.of(aquifer));
             warnings.addAll(words.warningsOfSet(List.of(record)));
             List<String> notes = new ArrayList<>(opened.notes());
             notes.addAll(words.remarks(WellRule.POINT));

@@ -30,6 +30,9 @@ final class Plausibility {
     /** From unfractured rock to gravel (the bounds from memory). */
     private static final Published CONDUCTIVITY = new Published(1e-13, 1, "m/s", "Freeze and Cherry 1979");
 
+    /** From dense crystalline rock to clay (the bounds from memory). */
+    private static final Published POROSITY = new Published(0, 0.7, "1", "Freeze and Cherry 1979");
+
     /**
      * The widest range that a handbook gives.
      *
@@ -73,7 +76,11 @@ final class Plausibility {
             case "flow conductivity", "flow conductivity_y", "flow vertical_conductivity" ->
                 checkAgainst(range, unit, CONDUCTIVITY);
             case "storativity" -> checkFraction(range);
-            default -> {}
+            default -> {
+                if (range.name().matches("(?s)(effective )?porosity of .*")) {
+                    checkPorosity(range, unit);
+                }
+            }
         }
     }
 
@@ -100,6 +107,17 @@ final class Plausibility {
         if (range.least() < 0 || range.greatest() > 1) {
             doubts.add("\"" + range.name() + "\" goes from " + Figures.shown(range.least()) + " to "
                     + Figures.shown(range.greatest()) + ": it is a fraction between 0 and 1.");
+        }
+    }
+
+    private void checkPorosity(ValueRange range, Measure unit) {
+        boolean low = range.least() < 0;
+        if (low || range.greatest() > 1) {
+            doubts.add("\"" + range.name() + "\" is " + Figures.shown(low ? range.least() : range.greatest()) + " at "
+                    + (low ? range.leastAt() : range.greatestAt())
+                    + ": physically impossible, pores take between 0 and 1 of a rock's volume; 25 % is written 0.25.");
+        } else {
+            checkAgainst(range, unit, POROSITY);
         }
     }
 

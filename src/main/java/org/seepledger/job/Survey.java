@@ -3,6 +3,8 @@ package org.seepledger.job;
 import java.util.ArrayList;
 import java.util.List;
 import org.seepledger.aquifer.Aquifer;
+import org.seepledger.aquifer.Grid;
+import org.seepledger.aquifer.GriddedValues;
 import org.seepledger.aquifer.Window;
 import org.seepledger.io.aquifer.Quantity;
 import org.seepledger.io.table.StepKind;
@@ -43,17 +45,26 @@ final class Survey {
         int steps = quantity.steps() == StepKind.INSTANT ? intervals + 1 : intervals;
         steps = quantity.values().changes() ? steps : 1;
         int layers = quantity.values().layered() ? aquifer.layers().size() : 1;
-        int rows = Math.max(1, CELLS_AT_ONCE / aquifer.grid().columns());
+        List<Window> windows = windows(aquifer.grid());
         for (int step = 0; step < steps; step++) {
             for (int layer = 0; layer < layers; layer++) {
-                for (int row = 0; row < aquifer.grid().rows(); row += rows) {
-                    int height = Math.min(rows, aquifer.grid().rows() - row);
-                    read(layer, step, new Window(row, 0, height, aquifer.grid().columns()));
+                for (Window window : windows) {
+                    read(layer, step, window);
                 }
             }
         }
         String unit = quantity.unit().toString();
         return new ValueRange(quantity.name(), unit, least, leastAt, greatest, greatestAt, values, missing);
+    }
+
+    /** {@return bands of rows, from the northernmost, that hold a whole grid} */
+    static List<Window> windows(Grid grid) {
+        int rows = Math.max(1, CELLS_AT_ONCE / grid.columns());
+        List<Window> windows = new ArrayList<>();
+        for (int row = 0; row < grid.rows(); row += rows) {
+            windows.add(new Window(row, 0, Math.min(rows, grid.rows() - row), grid.columns()));
+        }
+        return windows;
     }
 
     private void read(int layer, int step, Window window) {
@@ -77,15 +88,19 @@ final class Survey {
     }
 
     private String place(int layer, int step, Window window, int cell) {
+        return place(quantity.values(), quantity.steps(), layer, step, window, cell);
+    }
+
+    /** {@return where a value stands, as {@code layer 1, row 2, column 3, instant 0}} */
+    static String place(GriddedValues values, StepKind steps, int layer, int step, Window window, int cell) {
         StringBuilder place = new StringBuilder();
-        if (quantity.values().layered()) {
+        if (values.layered()) {
             place.append("layer ").append(layer + 1).append(", ");
         }
         place.append("row ").append(window.row() + cell / window.columns() + 1);
         place.append(", column ").append(window.column() + cell % window.columns() + 1);
-        if (quantity.values().changes()) {
-            boolean instants = quantity.steps() == StepKind.INSTANT;
-            place.append(instants ? ", instant " + step : ", interval " + (step + 1));
+        if (values.changes()) {
+            place.append(steps == StepKind.INSTANT ? ", instant " + step : ", interval " + (step + 1));
         }
         return place.toString();
     }

@@ -1,6 +1,7 @@
 package org.seepledger.balance;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
 
 import java.util.List;
 import java.util.Optional;
@@ -17,6 +18,7 @@ import org.seepledger.aquifer.FormulaValues;
 import org.seepledger.aquifer.GivenFaceFlow;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.GriddedValues;
+import org.seepledger.aquifer.Layer;
 import org.seepledger.aquifer.OuterFaces;
 import org.seepledger.aquifer.Source;
 import org.seepledger.ledger.Entry;
@@ -104,6 +106,22 @@ class PinchedOutLayerTest {
         assertThat(two.entry("top", 1).net()).isEqualTo(one.entry("top", 2).net());
         assertThat(two.entry("top", 1).net()).isNotZero();
         assertThat(two.totals().residual()).isEqualTo(one.totals().residual());
+    }
+
+    /** A cell whose top is not known is inactive; the lid below the next cell carries its flow all the same. */
+    @Test
+    void anUnknownSurfaceTakesNoLidFromTheOtherEndOfTheRange() {
+        GriddedValues holed = new FormulaValues(GRID, 1, (step, layer, x, y) -> x < 3 && y < 2 ? Double.NaN : 9);
+        List<Layer> layers = List.of(
+                new Layer("upper", Optional.of(holed), GriddedValues.constant(5), false),
+                new Layer("lower", Optional.empty(), GriddedValues.constant(2), false));
+        GriddedValues still = GriddedValues.constant(0);
+        Flow rising = new DarcyFlux(
+                still, still, Optional.of(GriddedValues.constant(0.1)), false, new OuterFaces(true, true, true));
+        BudgetReading budget = BudgetReading.of(
+                AquiferDraft.on(GRID).layers(layers).flow(rising).done(), Prisms.of("a", 0, 1, Shapes.box(0, 0, 6, 4)));
+        assertThat(budget.in("bottom")).isCloseTo(0.1 * 6 * 4, within(1e-12));
+        assertThat(budget.out("top")).isCloseTo(0.1 * (6 * 4 - 3 * 2), within(1e-12));
     }
 
     @Test

@@ -126,6 +126,16 @@ class BadDataTest {
                 key("crs", "'EPSG:1'", "aquifer.json, crs: found \"EPSG:1\", which is not a known CRS;"),
                 key("start_date", "'1 October'", "start_date: found \"1 October\"", "2021-10-01"),
                 key("storage", "{'specific_storage': 1e-5, 'storativity': 1e-4}", "storage:", "at most one of"),
+                key("solutes", "[{'name': 'a', 'porosty': 0.2}]", "Did you mean \"porosity\"?"),
+                key("solutes", "[{'porosity': 0.2}]", "found no \"name\""),
+                key("solutes", "[{'name': 'a'}, {'name': 'a'}]", "\"a\"", "names that differ"),
+                key("solutes", "[{'name': 'a', 'porosity': {'value': 1, 'unit': 'm'}}]", "porosity: found the unit"),
+                key("solutes", "[{'name': 'a', 'sorption': {'isotherm': 'straight'}}]", "one of \"linear\""),
+                key(
+                        "solutes",
+                        "[{'name': 'a', 'half_life': 'x.tif', 'decay_rate': 1}]",
+                        "at most one of \"half_life\""),
+                key("solutes", "[{'name': 'a', 'half_life': true}]", "half_life: found true"),
                 key("sources", AREAL.formatted("{'value': 1, 'unit': 'm3/d'}"), "sources[0].rate:", "\"m/d\""),
                 key("sources", "[{'category': '', 'kind': 'areal', 'rate': 0}]", "category: found \"\"", "not empty"),
                 key(

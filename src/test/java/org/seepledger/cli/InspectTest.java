@@ -102,9 +102,79 @@ class InspectTest {
                 "sources | [{'category': 'Pumping', 'kind': 'areal', 'rate': 0.001}] | \"Pumping\" adds water in places",
                 "sources | [{'category': 'evapotranspiration', 'kind': 'areal', 'rate': 0.001}] | check the sign",
                 "layers | [{'top': 1e5, 'bottom': 5}, {'bottom': 0}] | check its unit",
+                "solutes | [{'name': 'salt', 'porosity': 0.8}] | \"porosity of salt\" is 0.8000 1 at ",
+                "solutes | [{'name': 'salt', 'porosity': [0.3, 0.75]}] | 0.0 to 0.7 1 (Freeze and Cherry 1979)",
+                "solutes | [{'name': 'salt', 'porosity': 25}] | physically impossible",
+                "solutes | [{'name': 'salt', 'porosity': -0.1}] | is -0.1000 at row 1, column 1: physically impossible",
+                "solutes | [{'name': 's', 'effective_porosity': 1.2}] | \"effective porosity of s\" is 1.200 at ",
             })
     void doubtsWhatIsHardlyEverSo(String key, String value, String words) {
         assertThat(warnings(files().with(key, value))).contains(words);
+    }
+
+    @Test
+    void doubtsAnEffectivePorosityGreaterThanTheTotalOne() {
+        AquiferFiles files = files().with("flow/z", "1e-3")
+                .with("solutes", "[{'name': 'salt', 'porosity': [0.3, 0.2], 'effective_porosity': {'file': 'e.csv'}}]")
+                .file("e.csv", "row,col,e\n" + AquiferFiles.everywhere(3, 4, "0.1"));
+        assertThat(warnings(files)).isEqualTo("  none");
+        files.file("e.csv", ("row,col,e\n" + AquiferFiles.everywhere(3, 4, "0.1")).replace("2,3,0.1", "2,3,0.25"));
+        assertThat(warnings(files))
+                .contains(
+                        "\"effective porosity of salt\" is greater than \"porosity of salt\", most by 0.05000 at layer 2,"
+                                + " row 2, column 3");
+    }
+
+    /** All that formats.md documents of solutes may stand there; what is not documented may not. */
+    @Test
+    void takesTheKeysOfSolutes() {
+        String whole =
+                "[{'name': 'chloride', 'concentration': 5, 'unit': 'mg/L', 'detection_limit': 1, 'censored': false,"
+                        + " 'porosity': 0.25, 'effective_porosity': 0.2, 'bulk_density': {'value': 1700, 'unit': 'kg/m3'},"
+                        + " 'sorption': {'isotherm': 'linear', 'kd': 0.0, 'unit': 'L/kg'}, 'half_life': null,"
+                        + " 'sorbed_half_life': null, 'parent': 'salt', 'yield': 0.5, 'boundary_concentration': 3,"
+                        + " 'dispersion': {'longitudinal': 10, 'transverse': 1, 'vertical': 0.1, 'diffusion': 1e-4,"
+                        + " 'tortuosity': 0.5}}]";
+        AquiferFiles files = files().with("flow/z", "1e-3").with("solutes", whole);
+        assertThat(warnings(files)).isEqualTo("  none");
+        assertThat(inspected(files))
+                .containsPattern("porosity of chloride +1 +0\\.25 ")
+                .containsPattern("effective porosity of chloride +1 +0\\.2000");
+    }
+
+    @ParameterizedTest
+    @CsvSource(
+            delimiter = '|',
+            value = {
+                "-3 | 12 of 12 values of \"head\" lie below the lowest layer's bottom, most by 3 m: -3 m at row 1, column 1.",
+                "{'value': 9, 'unit': 'ft'} | none",
+                "19 | none",
+                "21 | values of \"head\" lie above the uppermost layer's top by more than all layers are thick, most by 11 m",
+            })
+    void doubtsHeadsInAnotherUnitOrDatum(String head, String words) {
+        String warned = warnings(files().with("flow/z", "1e-3").with("head", head));
+        assertThat(warned).contains(words);
+    }
+
+    @Test
+    void tellsHowManyHeadsAreDoubted() {
+        AquiferFiles files = files().with("flow/z", "1e-3")
+                .with("head", "{'file': 'h.csv'}")
+                .with("storage", "{'specific_yield': 0.1, 'specific_storage': 1e-5}");
+        String heads = "row,col,instant,h\n1,1,0,9\n2,3,2,-8\n1,2,1,-1\n1,2,2,-2\n";
+        assertThat(warnings(files.file("h.csv", heads)))
+                .contains("3 of 4 values of \"head\" lie below", "most by 8 m: -8 m at row 2, column 3, instant 2.");
+        assertThat(warnings(
+                        files.file("h.csv", heads.replace("1,2,2,-2", "1,2,2,2").replace("1,2,1,-1", "1,2,1,1"))))
+                .doesNotContain("lie below");
+    }
+
+    @Test
+    void doubtsHeadsAboveConfinedLayersInNoWay() {
+        AquiferFiles files = files().with("flow/z", "1e-3")
+                .with("layers", "[{'top': 10, 'bottom': 5, 'water_table': false}, {'bottom': 0}]")
+                .with("head", "400");
+        assertThat(warnings(files)).isEqualTo("  none");
     }
 
     @Test

@@ -59,6 +59,24 @@ class ExtractJobTest {
                 .hasSizeLessThan(Rows.of(folder.resolve("set/faces.csv")).size());
     }
 
+    /** Of solutes, what is read is kept, with its files; what names files that are not copied goes. */
+    @Test
+    void keepsThePorositiesOfSolutesAlone() throws IOException {
+        Path set = folder.resolve("set");
+        SmallSets.heads(set);
+        Files.writeString(set.resolve("pores.csv"), "layer,n\n1,0.3\n2,0.2\n");
+        Path description = set.resolve("aquifer.json");
+        String solutes = "{\"solutes\": [{\"name\": \"salt\", \"porosity\": {\"file\": \"pores.csv\"},"
+                + " \"concentration\": \"not-there.tif\"}], ";
+        Files.writeString(description, Files.readString(description).replaceFirst("\\{", solutes));
+        assertSameBudget(set);
+        assertThat(folder.resolve("extract/pores.csv")).exists();
+        assertThat(folder.resolve("extract/aquifer.json"))
+                .content()
+                .contains("salt", "pores.csv")
+                .doesNotContain("not-there");
+    }
+
     @Test
     void replacesAnEarlierExtractAlone() throws IOException {
         SmallSets.heads(folder.resolve("set"));

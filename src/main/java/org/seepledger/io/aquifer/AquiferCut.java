@@ -7,6 +7,7 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.HashSet;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
@@ -27,11 +28,13 @@ import org.seepledger.prism.Surroundings;
  * another subtraction of rounded numbers, and a budget of the copy would differ from the original's in its last digits;
  * as it is, they are the same. Tables lose the lines of other cells; rasters keep their shape, and pack well. So
  * {@code aquifer.json} stays as it is, but that a grid like a raster's is written out in numbers, and what this version
- * does not read (solutes) is left out.
+ * does not read (of solutes, all but names and porosities) is left out.
  */
 public final class AquiferCut {
 
     private static final ObjectMapper MAPPER = new ObjectMapper();
+
+    private static final List<String> READ_OF_SOLUTES = List.of("name", "porosity", "effective_porosity");
 
     private final AquiferFolder folder;
     private final Optional<String> crs;
@@ -119,9 +122,9 @@ public final class AquiferCut {
             copy.set("grid", grid(frame.grid()));
         }
         if (solutes) {
-            copy.remove("solutes");
+            copy.path("solutes").forEach(solute -> ((ObjectNode) solute).retain(READ_OF_SOLUTES));
             copy.path("sources").forEach(source -> ((ObjectNode) source).remove("concentration"));
-            notes.accept("Solutes are left out: this version balances water alone.");
+            notes.accept("Of solutes, names and porosities are copied alone: this version balances water.");
         }
         Files.writeString(file, MAPPER.writerWithDefaultPrettyPrinter().writeValueAsString(copy) + "\n");
     }

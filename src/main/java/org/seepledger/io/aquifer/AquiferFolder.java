@@ -4,6 +4,7 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.Map;
 import org.seepledger.aquifer.Aquifer;
+import org.seepledger.aquifer.Solute;
 import org.seepledger.io.crs.PlanCrs;
 import org.seepledger.io.result.Provenance;
 
@@ -11,6 +12,7 @@ import org.seepledger.io.result.Provenance;
  * An aquifer folder, open: its files stay readable until it is closed.
  *
  * @param aquifer the aquifer
+ * @param solutes what the water carries
  * @param crs the plan coordinate system
  * @param verticalDatum what elevations refer to; empty if not said
  * @param quantities all quantities given, for surveys
@@ -22,6 +24,7 @@ import org.seepledger.io.result.Provenance;
  */
 public record AquiferFolder(
         Aquifer aquifer,
+        List<Solute> solutes,
         PlanCrs crs,
         String verticalDatum,
         List<Quantity> quantities,

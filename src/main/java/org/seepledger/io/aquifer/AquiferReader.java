@@ -14,6 +14,7 @@ import org.seepledger.aquifer.Flow;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.GriddedValues;
 import org.seepledger.aquifer.Layer;
+import org.seepledger.aquifer.Solute;
 import org.seepledger.aquifer.Source;
 import org.seepledger.aquifer.Storage;
 import org.seepledger.aquifer.StorageKnowledge;
@@ -91,6 +92,7 @@ public final class AquiferReader {
                 : Optional.empty();
         Storage storage = storage(root.path("storage"), bindings);
         List<Source> sources = new SourcesReader(bindings, length, time, warnings).read(root.path("sources"));
+        List<Solute> solutes = new SolutesReader(bindings).read(root.path("solutes"));
         String name = root.has("name") ? root.get("name").textValue() : folderName;
         Aquifer aquifer = new Aquifer(name, grid, layers, frame.times(), flow, head, storage, sources, length, time);
         warnOfChoices(aquifer);
@@ -101,7 +103,16 @@ public final class AquiferReader {
         inputs.putAll(files.inputs());
         String datum = root.path("vertical_datum").asText();
         return new AquiferFolder(
-                aquifer, crs, datum, List.copyOf(bindings.quantities()), origins(), inputs, warnings, notes, files);
+                aquifer,
+                solutes,
+                crs,
+                datum,
+                List.copyOf(bindings.quantities()),
+                origins(),
+                inputs,
+                warnings,
+                notes,
+                files);
     }
 
     private Measure measure(String key, String like) {
