@@ -9,6 +9,7 @@ import java.io.IOException;
 import java.io.Reader;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.time.LocalDate;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
@@ -26,6 +27,7 @@ import org.seepledger.balance.WellRule;
 import org.seepledger.job.BalanceJob;
 import org.seepledger.job.BalanceRequest;
 import org.seepledger.job.InspectJob;
+import org.seepledger.job.ReportRequest;
 import org.seepledger.progress.Progress;
 
 /** The examples of {@code docs/formats.md} run as they stand, and the numbers that the page works out by hand hold. */
@@ -146,7 +148,8 @@ class DocsExamplesTest {
                         wells,
                         false,
                         1,
-                        false),
+                        false,
+                        ReportRequest.dated(LocalDate.of(2024, 5, 31))),
                 Progress.NONE);
         CSVFormat format =
                 CSVFormat.RFC4180.builder().setCommentMarker('#').setHeader().get();

@@ -2,6 +2,7 @@ package org.seepledger.aquifer;
 
 import java.time.Duration;
 import java.time.LocalDateTime;
+import java.time.format.DateTimeFormatter;
 import java.util.Arrays;
 import java.util.Optional;
 import org.seepledger.unit.Measure;
@@ -100,6 +101,18 @@ public final class Times {
     public Optional<LocalDateTime> date(double time) {
         long seconds = Math.round((time - instants[0]) * daysPerUnit * SECONDS_A_DAY);
         return start.map(date -> date.plusSeconds(seconds));
+    }
+
+    /**
+     * {@return the date of a time as ISO 8601 has it, without the hour where that is midnight}
+     *
+     * @param time in time units
+     */
+    public Optional<String> isoDate(double time) {
+        return date(time).map(date -> {
+            boolean midnight = date.equals(date.toLocalDate().atStartOfDay());
+            return midnight ? date.toLocalDate().toString() : DateTimeFormatter.ISO_LOCAL_DATE_TIME.format(date);
+        });
     }
 
     /**

@@ -26,7 +26,7 @@ import picocli.CommandLine.Parameters;
             "    --prisms sample-aquifers/terrace/prisms.geojson --out budget \\",
             "    --rate-unit L/s --max-closure-error 1",
             "",
-            "Written to DIR: budget.csv (the table), exchange.csv (what prisms give to each other),"
+            "Written to DIR: report.html (to read and hand over), budget.csv (the table), exchange.csv (what prisms give to each other),"
                     + " faces.geojson (faces with their flow), imbalance_l1.tif"
                     + " and so on (what does not balance, by cell and layer), run.json (inputs, options, warnings).",
             "Exit status: 0 done; 1 a fault of the program; 2 the command line is wrong; 3 the data are wrong;",
@@ -55,6 +55,9 @@ final class BalanceCommand implements Callable<Integer> {
 
     @Mixin
     private BudgetOptions options = new BudgetOptions();
+
+    @Mixin
+    private ReportOptions report = new ReportOptions();
 
     @Option(
             names = "--volume-unit",
@@ -116,6 +119,7 @@ final class BalanceCommand implements Callable<Integer> {
                 options.wells(),
                 options.clip(),
                 options.threads(),
-                overwrite);
+                overwrite,
+                report.request(terminal.clock()));
     }
 }

@@ -5,6 +5,7 @@ import java.io.PrintStream;
 import java.io.PrintWriter;
 import java.nio.charset.Charset;
 import java.nio.charset.StandardCharsets;
+import java.time.Clock;
 import java.util.Locale;
 import java.util.logging.Level;
 import java.util.logging.Logger;
@@ -68,6 +69,7 @@ public final class Seepledger {
                 new PrintStream(System.out, true, charset),
                 new PrintStream(System.err, true, charset),
                 interrupt,
+                Clock.systemDefaultZone(),
                 arguments);
         interrupt.finished();
         System.exit(status);
@@ -79,11 +81,12 @@ public final class Seepledger {
      * @param out where results are printed
      * @param err where progress and faults are printed
      * @param interrupt told when the user wants the work to stop
+     * @param clock what tells the date
      * @param arguments the command and its options
      * @return the exit status
      */
-    static int run(PrintStream out, PrintStream err, Interrupt interrupt, String... arguments) {
-        Terminal terminal = new Terminal(out, err, interrupt, System.console() != null);
+    static int run(PrintStream out, PrintStream err, Interrupt interrupt, Clock clock, String... arguments) {
+        Terminal terminal = new Terminal(out, err, interrupt, System.console() != null, clock);
         CommandLine line = new CommandLine(new Seepledger(), new CommandLine.IFactory() {
             @Override
             public <K> K create(Class<K> type) throws Exception {

@@ -36,6 +36,7 @@ public final class BalanceJob {
     private final Stopwatch stopwatch;
     private final ResultUnits units;
     private final List<Period> periods;
+    private final ReportFile report;
 
     private BalanceJob(BalanceRequest request, Subject subject, Stopwatch stopwatch, Progress progress) {
         this.request = request;
@@ -44,6 +45,7 @@ public final class BalanceJob {
         this.progress = progress;
         this.units = subject.units(request.rateUnit(), request.volumeUnit());
         this.periods = subject.periods(request.every(), request.periods(), request.waterYearStart());
+        this.report = new ReportFile(request.report(), periods);
     }
 
     /**
@@ -93,6 +95,7 @@ public final class BalanceJob {
             ExchangeCsv.write(out.file("exchange.csv"), statement, balance.exchange(), periods, times, units);
             FacesGeoJson.write(out.file("faces.geojson"), subject.crs(), subject.prisms(), records, units);
             writeImbalance(balance, out);
+            report.write(out, subject, balance, budgets, units, statement, optionsOfResult());
             writeRecord(out, statement, balance);
         } catch (IOException e) {
             throw new UsageFault("The results cannot be written beside " + request.out() + " (" + Unreadable.reason(e)
@@ -128,6 +131,14 @@ public final class BalanceJob {
     }
 
     private Map<String, String> options() {
+        Map<String, String> options = optionsOfResult();
+        options.putAll(report.options());
+        options.put("threads", String.valueOf(request.threads()));
+        return options;
+    }
+
+    /** The options that results depend on. */
+    private Map<String, String> optionsOfResult() {
         Map<String, String> options = new LinkedHashMap<>();
         options.put("aquifer", request.aquifer().toString());
         options.put("prisms", request.prisms().toString());
@@ -138,7 +149,6 @@ public final class BalanceJob {
         request.volumeUnit().ifPresent(unit -> options.put("volume-unit", unit.toString()));
         options.put("wells", request.wells().name().toLowerCase(Locale.ROOT));
         options.put("clip", String.valueOf(request.clip()));
-        options.put("threads", String.valueOf(request.threads()));
         return options;
     }
 

@@ -21,6 +21,7 @@ import org.seepledger.unit.Measure;
  * @param clip whether prisms are cut at the grid's edge
  * @param threads how many threads may work
  * @param overwrite whether an earlier run's files may be replaced
+ * @param report what the report is to look like
  */
 public record BalanceRequest(
         Path aquifer,
@@ -34,4 +35,5 @@ public record BalanceRequest(
         WellRule wells,
         boolean clip,
         int threads,
-        boolean overwrite) {}
+        boolean overwrite,
+        ReportRequest report) {}

@@ -28,7 +28,6 @@ final class FaceArrows {
     private static final double SMALL = 10.5;
 
     private final Map<String, Face> faces = new LinkedHashMap<>();
-    private final double factor;
 
     /** A face of one or more sides, and where its arrow stands. */
     private static final class Face {
@@ -72,10 +71,9 @@ final class FaceArrows {
      *
      * @param prism the prism
      * @param budget its budget
-     * @param factor how many units shown one length³ of the budget is, per time
+     * @param unit the unit to show
      */
-    FaceArrows(Prism prism, PeriodBudget budget, double factor) {
-        this.factor = factor;
+    FaceArrows(Prism prism, PeriodBudget budget, UnitShown unit) {
         for (Ring ring : prism.rings()) {
             for (int i = 0; i < ring.sides().size(); i++) {
                 Side side = ring.sides().get(i);
@@ -87,7 +85,7 @@ final class FaceArrows {
             if (entry.account().group() == Group.SIDE
                     && face != null
                     && entry.account().quantified()) {
-                face.add(entry.net());
+                face.add(unit.of(entry.net(), budget.period()));
             }
         }
     }
@@ -131,10 +129,10 @@ final class FaceArrows {
         sheet.labels().keepFree(new Box(x - room, y - room, 2 * room, 2 * room));
     }
 
-    private void label(MapSheet sheet, Face face, double largest) {
+    private static void label(MapSheet sheet, Face face, double largest) {
         String flow = Double.isNaN(face.net)
                 ? "–"
-                : face.net == 0 ? "0" : (face.net > 0 ? "in " : "out ") + Figures.typeset(Math.abs(face.net) * factor);
+                : face.net == 0 ? "0" : (face.net > 0 ? "in " : "out ") + Figures.typeset(Math.abs(face.net));
         String words = face.item + ": " + flow;
         double x = sheet.frame().x(face.x);
         double y = sheet.frame().y(face.y);

@@ -99,8 +99,7 @@ public final class MapPicture {
      * @param ground what lies under it
      * @param line the line of the section, if there is one
      * @param budget the prism's budget over the record
-     * @param factor how many units shown one length³ of the budget is, per time
-     * @param unit the unit shown
+     * @param unit the unit to show
      * @param width in logical pixels
      */
     public static Picture ofFaces(
@@ -110,18 +109,17 @@ public final class MapPicture {
             Optional<Ground> ground,
             Optional<SectionLine> line,
             PeriodBudget budget,
-            double factor,
-            String unit,
+            UnitShown unit,
             double width) {
         MapPicture map = new MapPicture(subject, others, ground, width);
         line.ifPresent(map::drawLine);
-        new FaceArrows(subject, budget, factor).draw(map.sheet);
+        new FaceArrows(subject, budget, unit).draw(map.sheet);
         wells.forEach(map.sheet::well);
         others.forEach(map.sheet::name);
         return map.picture(
                 "Map of " + subject.name() + " with the flow through its faces",
                 "Arrows across the faces point inward where water comes in and outward where it leaves; their widths are in"
-                        + " proportion to net flow in " + unit + ", mean over the record.");
+                        + " proportion to net flow in " + unit.words() + ".");
     }
 
     /**

@@ -1,12 +1,8 @@
 package org.seepledger.picture;
 
-import java.math.BigDecimal;
-import java.math.MathContext;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.function.ToDoubleFunction;
-import java.util.stream.DoubleStream;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.PlacedWell;
 import org.seepledger.aquifer.Screen;
@@ -26,45 +22,29 @@ import org.seepledger.unit.Figures;
 public final class SectionPicture {
 
     private static final double HEIGHT = 260;
+    private static final double TOP = 22;
     private static final double LEFT = 48;
     private static final double RIGHT = 96;
-    private static final double SMALL = 10;
+    private static final double KEY = 56;
+    private static final double SMALL = SectionSheet.SMALL;
+    private static final Stroke AT_START = Stroke.of(Ink.Token.WATER, 1.3).dashed(5.0, 3.0);
+    private static final Stroke AT_END = Stroke.of(Ink.Token.WATER, 2);
+
+    /** Wells are shown up to this share of the line's length beside it. */
     private static final double NEARBY = 0.04;
 
     private final Aquifer aquifer;
-    private final Prism prism;
     private final SectionLine line;
+    private final double length;
     private final Profile profile;
-    private final Box box;
-    private final double lowest;
-    private final double highest;
-    private final Labels labels;
-    private final List<Mark> inside = new ArrayList<>();
-    private final List<Mark> over = new ArrayList<>();
-    private final List<Mark> marks = new ArrayList<>();
+    private final SectionSheet sheet;
 
-    private SectionPicture(Aquifer aquifer, Prism prism, SectionLine line, Profile profile, double width) {
+    private SectionPicture(Aquifer aquifer, SectionLine line, Profile profile, double width) {
         this.aquifer = aquifer;
-        this.prism = prism;
         this.line = line;
+        this.length = line.length() * aquifer.grid().planUnit();
         this.profile = profile;
-        this.box = new Box(LEFT, 22, width - LEFT - RIGHT, HEIGHT - 22 - 56);
-        double least = elevations().min().orElseThrow();
-        double greatest = elevations().max().orElseThrow();
-        double margin = Math.max(1e-6, 0.08 * (greatest - least));
-        this.lowest = least - margin;
-        this.highest = greatest + 2.5 * margin;
-        this.labels = new Labels(box.inset(1));
-    }
-
-    private DoubleStream elevations() {
-        return profile.stretches().stream()
-                .flatMapToDouble(stretch -> DoubleStream.concat(
-                        DoubleStream.of(stretch.column().surfaces()),
-                        DoubleStream.of(
-                                stretch.column().levelAtStart(),
-                                stretch.column().levelAtEnd())))
-                .filter(Double::isFinite);
+        this.sheet = new SectionSheet(profile, new Box(LEFT, TOP, width - LEFT - RIGHT, HEIGHT - TOP - KEY));
     }
 
     /**
@@ -74,167 +54,72 @@ public final class SectionPicture {
      * @param prism the prism
      * @param line the line
      * @param budget the prism's budget over the record
-     * @param factor how many units shown one length³ of the budget is, per time
-     * @param unit the unit shown
+     * @param unit the unit to show
      * @param width in logical pixels
      */
     public static Optional<Picture> of(
-            Aquifer aquifer,
-            Prism prism,
-            SectionLine line,
-            PeriodBudget budget,
-            double factor,
-            String unit,
-            double width) {
+            Aquifer aquifer, Prism prism, SectionLine line, PeriodBudget budget, UnitShown unit, double width) {
         Profile profile = Profile.along(line, aquifer, prism);
-        boolean empty = profile.stretches().stream()
-                .allMatch(
-                        stretch -> DoubleStream.of(stretch.column().surfaces()).noneMatch(Double::isFinite));
-        return empty
+        return SectionSheet.elevations(profile).findAny().isEmpty()
                 ? Optional.empty()
-                : Optional.of(new SectionPicture(aquifer, prism, line, profile, width).draw(budget, factor, unit));
+                : Optional.of(new SectionPicture(aquifer, line, profile, width).draw(prism, budget, unit));
     }
 
-    private Picture draw(PeriodBudget budget, double factor, String unit) {
+    private Picture draw(Prism prism, PeriodBudget budget, UnitShown unit) {
         drawLayers();
-        drawWater(
-                stretch -> stretch.column().levelAtStart(),
-                Stroke.of(Ink.Token.WATER, 1.3).dashed(5.0, 3.0));
-        drawWater(stretch -> stretch.column().levelAtEnd(), Stroke.of(Ink.Token.WATER, 2));
-        drawPrism();
+        sheet.level(stretch -> stretch.column().levelAtStart(), AT_START);
+        sheet.level(stretch -> stretch.column().levelAtEnd(), AT_END);
+        sheet.bodies(
+                Stretch::top,
+                Stretch::bottom,
+                new Fill(Ink.Token.PRISM, 0.14, Mark.Texture.PLAIN),
+                Stroke.of(Ink.Token.PRISM, 2));
         aquifer.placedWells().forEach(this::drawWell);
-        drawLid(budget, "top", factor);
-        drawLid(budget, "bottom", factor);
-        marks.add(new Mark.Group(box, inside));
-        marks.addAll(over);
-        drawAxes();
-        drawKey(unit);
+        drawLid(budget, "top", unit);
+        drawLid(budget, "bottom", unit);
+        List<Mark> marks = sheet.marks(length);
+        Box box = sheet.box();
+        marks.add(Mark.Text.of(box.x(), 14, "A", 13, Mark.Anchor.MIDDLE).strong());
+        marks.add(Mark.Text.of(box.right(), 14, "A′", 13, Mark.Anchor.MIDDLE).strong());
+        drawKey(marks, unit.words());
         return new Picture(
                 box.right() + RIGHT, HEIGHT, "Vertical section through " + prism.name(), description(), marks);
     }
 
     private String description() {
-        return "Layers, water level and the body of the prism along a line of "
-                + Figures.shown(line.length()) + " plan units, with heights " + exaggeration()
-                + " times exaggerated and the net flow through top and bottom.";
-    }
-
-    private String exaggeration() {
-        double across = line.length() * aquifer.grid().planUnit() / box.width();
-        double up = (highest - lowest) / box.height();
-        return new BigDecimal(across / up).round(new MathContext(2)).toPlainString();
-    }
-
-    private double x(double share) {
-        return box.x() + share * box.width();
-    }
-
-    private double y(double elevation) {
-        return box.bottom() - (elevation - lowest) / (highest - lowest) * box.height();
+        return "Layers, water level and the body of the prism along a line of " + Figures.shown(length) + " "
+                + aquifer.lengthUnit() + ", with heights " + sheet.exaggeration(length)
+                + " times exaggerated, and the net flow through top and bottom.";
     }
 
     private void drawLayers() {
-        int layers = aquifer.layers().size();
-        for (int k = 0; k < layers; k++) {
+        for (int k = 0; k < aquifer.layers().size(); k++) {
             int layer = k;
-            Fill fill = new Fill(Ink.Token.TEXT, k % 2 == 0 ? 0.05 : 0.13, Mark.Texture.PLAIN);
-            for (double[] body : bodies(
+            sheet.bodies(
                     stretch -> stretch.column().surfaces()[layer],
-                    stretch -> stretch.column().surfaces()[layer + 1])) {
-                inside.add(
-                        new Mark.Area(List.of(body), Optional.of(fill), Optional.of(Stroke.of(Ink.Token.MUTED, 0.6))));
-            }
+                    stretch -> stretch.column().surfaces()[layer + 1],
+                    new Fill(Ink.Token.TEXT, k % 2 == 0 ? 0.05 : 0.13, Mark.Texture.PLAIN),
+                    Stroke.of(Ink.Token.MUTED, 0.6));
             nameLayer(layer);
         }
     }
 
+    /** Writes a layer's name beside the frame, at the height that it has near it. */
     private void nameLayer(int layer) {
         List<Stretch> stretches = profile.stretches();
+        Box box = sheet.box();
         for (int i = stretches.size() - 1; i >= 0; i--) {
             double[] surfaces = stretches.get(i).column().surfaces();
-            double room = y(surfaces[layer + 1]) - y(surfaces[layer]);
-            if (room > 3 && x(stretches.get(i).to()) > box.right() - 0.25 * box.width()) {
-                double middle = (y(surfaces[layer]) + y(surfaces[layer + 1])) / 2 + 0.35 * SMALL;
+            double room = sheet.y(surfaces[layer + 1]) - sheet.y(surfaces[layer]);
+            if (room > 3 && stretches.get(i).to() > 0.75) {
+                double middle = (sheet.y(surfaces[layer]) + sheet.y(surfaces[layer + 1])) / 2 + 0.35 * SMALL;
                 String words = (layer + 1) + " " + aquifer.layers().get(layer).name();
-                over.add(Mark.Text.of(
-                                box.right() + 6,
-                                middle,
-                                Lettering.fitted(words, SMALL, RIGHT - 8),
-                                SMALL,
-                                Mark.Anchor.START)
-                        .in(Ink.Token.MUTED));
+                String fitted = Lettering.fitted(words, SMALL, RIGHT - 8);
+                sheet.over()
+                        .add(Mark.Text.of(box.right() + 6, middle, fitted, SMALL, Mark.Anchor.START)
+                                .in(Ink.Token.MUTED));
                 return;
             }
-        }
-    }
-
-    /** Bodies between two surfaces, as long as both have values and the upper one is higher. */
-    private List<double[]> bodies(ToDoubleFunction<Stretch> upper, ToDoubleFunction<Stretch> lower) {
-        List<double[]> bodies = new ArrayList<>();
-        List<Stretch> run = new ArrayList<>();
-        for (Stretch stretch : profile.stretches()) {
-            if (upper.applyAsDouble(stretch) > lower.applyAsDouble(stretch)) {
-                run.add(stretch);
-            } else {
-                addBody(bodies, run, upper, lower);
-            }
-        }
-        addBody(bodies, run, upper, lower);
-        return bodies;
-    }
-
-    private void addBody(
-            List<double[]> bodies,
-            List<Stretch> run,
-            ToDoubleFunction<Stretch> upper,
-            ToDoubleFunction<Stretch> lower) {
-        if (run.isEmpty()) {
-            return;
-        }
-        double[] body = new double[8 * run.size()];
-        int at = 0;
-        for (Stretch stretch : run) {
-            double y = y(upper.applyAsDouble(stretch));
-            at = put(body, at, x(stretch.from()), y, x(stretch.to()), y);
-        }
-        for (int i = run.size() - 1; i >= 0; i--) {
-            double y = y(lower.applyAsDouble(run.get(i)));
-            at = put(body, at, x(run.get(i).to()), y, x(run.get(i).from()), y);
-        }
-        bodies.add(body);
-        run.clear();
-    }
-
-    private static int put(double[] target, int at, double... values) {
-        System.arraycopy(values, 0, target, at, values.length);
-        return at + values.length;
-    }
-
-    private void drawWater(ToDoubleFunction<Stretch> level, Stroke stroke) {
-        List<Double> run = new ArrayList<>();
-        for (Stretch stretch : profile.stretches()) {
-            double elevation = level.applyAsDouble(stretch);
-            if (Double.isNaN(elevation)) {
-                addLine(run, stroke);
-            } else {
-                run.addAll(List.of((x(stretch.from()) + x(stretch.to())) / 2, y(elevation)));
-            }
-        }
-        addLine(run, stroke);
-    }
-
-    private void addLine(List<Double> run, Stroke stroke) {
-        if (run.size() > 2) {
-            inside.add(
-                    new Mark.Line(run.stream().mapToDouble(Double::doubleValue).toArray(), stroke));
-        }
-        run.clear();
-    }
-
-    private void drawPrism() {
-        for (double[] body : bodies(Stretch::top, Stretch::bottom)) {
-            Fill fill = new Fill(Ink.Token.PRISM, 0.14, Mark.Texture.PLAIN);
-            inside.add(new Mark.Area(List.of(body), Optional.of(fill), Optional.of(Stroke.of(Ink.Token.PRISM, 2))));
         }
     }
 
@@ -251,41 +136,43 @@ public final class SectionPicture {
         profile.stretches().stream()
                 .filter(stretch -> stretch.to() >= share)
                 .findFirst()
-                .ifPresent(stretch -> drawWell(well, x(share), stretch.column().surfaces()));
+                .ifPresent(stretch ->
+                        drawWell(well, sheet.x(share), stretch.column().surfaces()));
     }
 
     private void drawWell(PlacedWell well, double x, double[] surfaces) {
-        double ground = y(surfaces[0]);
+        double ground = sheet.y(surfaces[0]);
         double upper;
         double lower;
         if (well.well().screen() instanceof Screen.InLayer in) {
-            upper = y(surfaces[in.layer()]);
-            lower = y(surfaces[in.layer() + 1]);
+            upper = sheet.y(surfaces[in.layer()]);
+            lower = sheet.y(surfaces[in.layer() + 1]);
         } else {
             Screen.Between between = (Screen.Between) well.well().screen();
-            upper = y(between.top());
-            lower = y(between.bottom());
+            upper = sheet.y(between.top());
+            lower = sheet.y(between.bottom());
         }
         if (Double.isNaN(ground + upper + lower)) {
             return;
         }
-        inside.add(new Mark.Line(new double[] {x, ground - 6, x, lower}, Stroke.of(Ink.Token.TEXT, 1.2)));
-        inside.add(new Mark.Line(new double[] {x, upper, x, lower}, Stroke.of(Ink.Token.TEXT, 4)));
-        labels.place(
-                List.of(Mark.Text.of(x, ground - 9, well.well().name(), SMALL, Mark.Anchor.MIDDLE)
-                        .haloed()),
-                over);
+        sheet.inside(new Mark.Line(new double[] {x, ground - 6, x, lower}, Stroke.of(Ink.Token.TEXT, 1.2)));
+        sheet.inside(new Mark.Line(new double[] {x, upper, x, lower}, Stroke.of(Ink.Token.TEXT, 4)));
+        sheet.labels()
+                .place(
+                        List.of(Mark.Text.of(x, ground - 9, well.well().name(), SMALL, Mark.Anchor.MIDDLE)
+                                .haloed()),
+                        sheet.over());
     }
 
     /** The net flow through a lid as an arrow into the body or out of it, in the middle of the longest cut. */
-    private void drawLid(PeriodBudget budget, String lid, double factor) {
+    private void drawLid(PeriodBudget budget, String lid, UnitShown unit) {
         double net = 0;
         boolean known = false;
         for (Entry entry : budget.entries()) {
             boolean ours = entry.account().group() == Group.LID
                     && entry.account().item().equals(lid);
             if (ours && entry.account().quantified()) {
-                net += entry.net();
+                net += unit.of(entry.net(), budget.period());
                 known = true;
             }
         }
@@ -293,18 +180,18 @@ public final class SectionPicture {
         if (!known || middle.isEmpty()) {
             return;
         }
-        double x = (x(middle.get().from()) + x(middle.get().to())) / 2;
+        double x = (sheet.x(middle.get().from()) + sheet.x(middle.get().to())) / 2;
         boolean isTop = lid.equals("top");
-        double y = y(isTop ? middle.get().top() : middle.get().bottom());
+        double y = sheet.y(isTop ? middle.get().top() : middle.get().bottom());
         double reach = (isTop ? -1 : 1) * (net > 0 ? -1 : 1) * 12;
-        String words =
-                lid + ": " + (net == 0 ? "0" : (net > 0 ? "in " : "out ") + Figures.typeset(Math.abs(net) * factor));
+        String words = lid + ": " + (net == 0 ? "0" : (net > 0 ? "in " : "out ") + Figures.typeset(Math.abs(net)));
         Ink ink = net > 0 ? Ink.Token.GAIN : net < 0 ? Ink.Token.LOSS : Ink.Token.MUTED;
         if (net != 0) {
             Fill fill = net > 0 ? Fill.of(ink) : new Fill(ink, 1, Mark.Texture.RISING);
-            over.add(
-                    new Arrow(x, y - reach, x, y + reach, 5).mark(fill, Stroke.of(net > 0 ? Ink.Token.PAPER : ink, 1)));
-            labels.keepFree(new Box(x - 8, y - 13, 16, 26));
+            sheet.over()
+                    .add(new Arrow(x, y - reach, x, y + reach, 5)
+                            .mark(fill, Stroke.of(net > 0 ? Ink.Token.PAPER : ink, 1)));
+            sheet.labels().keepFree(new Box(x - 8, y - 13, 16, 26));
         }
         List<Mark.Text> choices = new ArrayList<>();
         for (int side : new int[] {1, -1}) {
@@ -316,7 +203,7 @@ public final class SectionPicture {
                         .in(ink));
             }
         }
-        labels.place(choices, over);
+        sheet.labels().place(choices, sheet.over());
     }
 
     /** The stretch in the middle of those that lie in the prism. */
@@ -326,47 +213,23 @@ public final class SectionPicture {
         return cut.isEmpty() ? Optional.empty() : Optional.of(cut.get(cut.size() / 2));
     }
 
-    private void drawAxes() {
-        Stroke thin = Stroke.of(Ink.Token.MUTED, 1);
-        marks.add(new Mark.Area(List.of(box.ring()), Optional.empty(), Optional.of(thin)));
-        Ticks up = Ticks.within(lowest, highest, 6);
-        for (int i = 0; i < up.count(); i++) {
-            double y = y(up.values().get(i));
-            marks.add(new Mark.Line(new double[] {box.x() - 4, y, box.x(), y}, thin));
-            marks.add(Mark.Text.of(box.x() - 7, y + 0.35 * SMALL, up.label(i), SMALL, Mark.Anchor.END)
-                    .in(Ink.Token.MUTED));
-        }
-        double length = line.length() * aquifer.grid().planUnit();
-        Ticks across = Ticks.within(0, length, 8);
-        for (int i = 0; i < across.count(); i++) {
-            double x = x(across.values().get(i) / length);
-            marks.add(new Mark.Line(new double[] {x, box.bottom(), x, box.bottom() + 4}, thin));
-            marks.add(Mark.Text.of(x, box.bottom() + 15, across.label(i), SMALL, Mark.Anchor.MIDDLE)
-                    .in(Ink.Token.MUTED));
-        }
-        marks.add(Mark.Text.of(box.x(), 14, "A", 13, Mark.Anchor.MIDDLE).strong());
-        marks.add(Mark.Text.of(box.right(), 14, "A′", 13, Mark.Anchor.MIDDLE).strong());
-    }
-
-    private void drawKey(String unit) {
+    private void drawKey(List<Mark> marks, String unit) {
+        Box box = sheet.box();
         double y = box.bottom() + 36;
-        String length = aquifer.lengthUnit().toString();
         double x = box.x();
         if (aquifer.head().isPresent()) {
-            marks.add(new Mark.Line(new double[] {x, y - 3, x + 22, y - 3}, Stroke.of(Ink.Token.WATER, 2)));
+            marks.add(new Mark.Line(new double[] {x, y - 3, x + 22, y - 3}, AT_END));
             boolean moves = aquifer.head().get().changes();
             String level = moves ? "water level, end of record" : "water level";
             marks.add(Mark.Text.of(x + 27, y, level, SMALL, Mark.Anchor.START).in(Ink.Token.MUTED));
             x += 27 + Lettering.width(level, SMALL) + 14;
             if (moves) {
-                marks.add(new Mark.Line(
-                        new double[] {x, y - 3, x + 22, y - 3},
-                        Stroke.of(Ink.Token.WATER, 1.3).dashed(5.0, 3.0)));
+                marks.add(new Mark.Line(new double[] {x, y - 3, x + 22, y - 3}, AT_START));
                 marks.add(Mark.Text.of(x + 27, y, "at its begin", SMALL, Mark.Anchor.START)
                         .in(Ink.Token.MUTED));
             }
         }
-        String units = "Elevation and distance in " + length + ", heights " + exaggeration()
+        String units = "Elevation and distance in " + aquifer.lengthUnit() + ", heights " + sheet.exaggeration(length)
                 + " times exaggerated; flow in " + unit;
         marks.add(Mark.Text.of(box.x(), y + 15, units, SMALL, Mark.Anchor.START).in(Ink.Token.MUTED));
     }

@@ -1,22 +1,13 @@
 package org.seepledger.report;
 
-import java.util.ArrayList;
-import java.util.Comparator;
-import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Map;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.balance.Balance;
-import org.seepledger.balance.Periods;
 import org.seepledger.balance.Whereabouts;
 import org.seepledger.io.result.PrismBudget;
 import org.seepledger.io.result.ResultUnits;
 import org.seepledger.ledger.Disclaimer;
-import org.seepledger.ledger.Entry;
-import org.seepledger.ledger.Group;
-import org.seepledger.ledger.Ledger;
 import org.seepledger.ledger.PeriodBudget;
-import org.seepledger.ledger.Totals;
 import org.seepledger.unit.Figures;
 
 /** The summary of a balance on the terminal: first the warnings, then for each prism
@@ -25,26 +16,11 @@ public final class BalanceSummary {
 
     private static final int TERMS_SHOWN = 6;
 
-    /** Below this a closure error is rounding and nothing else. */
-    private static final double ROUNDING_PERCENT = 1e-9;
-
     private final Aquifer aquifer;
     private final Balance balance;
     private final List<PrismBudget> budgets;
     private final ResultUnits units;
     private final StringBuilder text = new StringBuilder();
-
-    /** What one item came to over all layers. */
-    private record Term(String item, double inflow, double outflow) {
-
-        double net() {
-            return inflow - outflow;
-        }
-
-        Term plus(Term other) {
-            return new Term(item, inflow + other.inflow, outflow + other.outflow);
-        }
-    }
 
     private BalanceSummary(Aquifer aquifer, Balance balance, List<PrismBudget> budgets, ResultUnits units) {
         this.aquifer = aquifer;
@@ -77,9 +53,9 @@ public final class BalanceSummary {
         int intervals = aquifer.times().intervals();
         int prisms = balance.ledgers().size();
         text.append("Water budget of \"").append(aquifer.name()).append("\": ");
-        text.append(counted(prisms, "prism"))
+        text.append(Wording.counted(prisms, "prism"))
                 .append(", ")
-                .append(counted(intervals, "interval"))
+                .append(Wording.counted(intervals, "interval"))
                 .append(", time ");
         text.append(Figures.shown(aquifer.times().instant(0))).append(" to ");
         text.append(Figures.shown(aquifer.times().instant(intervals))).append(' ');
@@ -100,98 +76,39 @@ public final class BalanceSummary {
         }
     }
 
-    private static String counted(int count, String what) {
-        return count + " " + what + (count == 1 ? "" : "s");
-    }
-
     private void writePrism(int prism) {
-        Ledger ledger = balance.ledgers().get(prism);
-        PeriodBudget record = ledger.budget(new Periods(aquifer.times()).record());
-        text.append('\n').append(ledger.prism()).append('\n');
-        writeClosure(record, budgets.get(prism));
-        writeTerms(record);
-        Whereabouts where = balance.whereabouts().get(prism);
-        if (ledger.storageKnown() && isWorthLocating(where, record)) {
-            writeWhereabouts(where, record);
+        PrismResult result = PrismResult.of(aquifer, balance, budgets, prism);
+        text.append('\n').append(result.prism()).append('\n');
+        new ClosureWords(result, Wording.plain(units))
+                .inShort()
+                .forEach(sentence -> text.append("  ").append(sentence).append('\n'));
+        writeTerms(result);
+        if (result.isWorthLocating()) {
+            writeWhereabouts(result.whereabouts(), result.record());
         }
     }
 
-    private void writeClosure(PeriodBudget record, PrismBudget periods) {
-        Totals totals = record.totals();
-        double time = record.period().duration();
-        if (Double.isNaN(totals.storageChange())) {
-            double unexplained = totals.inflow() - totals.outflow();
-            text.append(
-                            "  Closure cannot be judged: change in storage is not known. Inflow less outflow, storage included,"
-                                    + " is ")
-                    .append(rate(unexplained, time, true))
-                    .append(".\n");
-            return;
-        }
-        boolean closes = Math.abs(totals.closureError()) < ROUNDING_PERCENT;
-        text.append(closes ? "  Closes to rounding: closure error " : "  Closure error ");
-        text.append(Figures.percent(totals.closureError()));
-        text.append(" of throughput (")
-                .append(Figures.percent(totals.netClosureError()))
-                .append(" of net flow): ");
-        text.append(rate(totals.residual(), time, true)).append(" of ");
-        text.append(rate(totals.throughput(), time, true)).append(" is unexplained.\n");
-        if (periods.periods().size() > 1) {
-            periods.periods().stream()
-                    .max(Comparator.comparingDouble(
-                            budget -> size(budget.totals().closureError())))
-                    .ifPresent(worst -> text.append("  Worst period: ")
-                            .append(worst.period().name())
-                            .append(", ")
-                            .append(Figures.percent(worst.totals().closureError()))
-                            .append(".\n"));
-        }
-    }
-
-    private static double size(double value) {
-        return Double.isNaN(value) ? 0 : Math.abs(value);
-    }
-
-    private void writeTerms(PeriodBudget record) {
-        Map<String, Term> terms = new LinkedHashMap<>();
-        for (Entry entry : record.entries()) {
-            if (entry.account().quantified()) {
-                Group group = entry.account().group();
-                String item = group == Group.LID
-                        ? entry.account().item() + " lid"
-                        : entry.account().item();
-                terms.merge(group + item, new Term(item, entry.inflow(), entry.outflow()), Term::plus);
-            }
-        }
-        List<Term> sorted = new ArrayList<>(terms.values());
-        sorted.sort(Comparator.comparingDouble((Term term) -> -Math.max(term.inflow(), term.outflow())));
-        double time = record.period().duration();
-        double throughput = record.totals().throughput();
+    private void writeTerms(PrismResult result) {
+        List<Term> sorted = Term.bySize(result.terms());
+        double time = result.record().period().duration();
+        double throughput = result.record().totals().throughput();
         TextTable table = new TextTable().row("", "in", "out", "net", "of throughput");
         for (Term term : sorted.subList(0, Math.min(TERMS_SHOWN, sorted.size()))) {
-            table.row(
-                    term.item(),
-                    rate(term.inflow(), time, false),
-                    rate(term.outflow(), time, false),
-                    rate(term.net(), time, false),
-                    Figures.percent(throughput == 0 ? Double.NaN : 100 * Math.abs(term.net()) / throughput));
+            String share = Figures.percent(throughput == 0 ? Double.NaN : 100 * Math.abs(term.net()) / throughput);
+            addRow(table, term.name(), term.inflow(), term.outflow(), time, share);
         }
         if (sorted.size() > TERMS_SHOWN) {
-            Term rest = sorted.subList(TERMS_SHOWN, sorted.size()).stream().reduce(new Term("", 0, 0), Term::plus);
-            table.row(
-                    counted(sorted.size() - TERMS_SHOWN, "smaller term"),
-                    rate(rest.inflow(), time, false),
-                    rate(rest.outflow(), time, false),
-                    rate(rest.net(), time, false),
-                    "");
+            List<Term> rest = sorted.subList(TERMS_SHOWN, sorted.size());
+            double inflow = rest.stream().mapToDouble(Term::inflow).sum();
+            double outflow = rest.stream().mapToDouble(Term::outflow).sum();
+            addRow(table, Wording.counted(rest.size(), "smaller term"), inflow, outflow, time, "");
         }
         text.append("  Largest terms in ").append(units.rate()).append(":\n");
         table.appendTo(text, "    ");
     }
 
-    private boolean isWorthLocating(Whereabouts where, PeriodBudget record) {
-        double throughput = record.totals().throughput() / record.period().duration();
-        return !where.largest().isEmpty() && where.magnitude() > 1e-9 * throughput;
+    private void addRow(TextTable table, String name, double inflow, double outflow, double time, String share) {
+        table.row(name, rate(inflow, time), rate(outflow, time), rate(inflow - outflow, time), share);
     }
 
     private void writeWhereabouts(Whereabouts where, PeriodBudget record) {
@@ -205,8 +122,7 @@ public final class BalanceSummary {
         HotSpots.append(text, aquifer.grid(), where.largest(), unit, units.rateFactor(), throughput);
     }
 
-    private String rate(double volume, double time, boolean withUnit) {
-        String shown = Figures.shown(volume / time * units.rateFactor());
-        return withUnit ? shown + " " + units.rate() : shown;
+    private String rate(double volume, double time) {
+        return Figures.shown(volume / time * units.rateFactor());
     }
 }

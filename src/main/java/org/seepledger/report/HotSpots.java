@@ -15,15 +15,13 @@ final class HotSpots {
             StringBuilder text, Grid grid, List<HotSpot> spots, String unit, double factor, double throughput) {
         TextTable table = new TextTable().row("layer", "row", "column", "x", "y", unit, "of throughput");
         for (HotSpot spot : spots) {
-            int fromSouth = grid.flipped(spot.row());
-            double x = grid.x().edge(spot.column()) + 0.5 * grid.x().size(spot.column());
-            double y = grid.y().edge(fromSouth) + 0.5 * grid.y().size(fromSouth);
+            CellPlace place = CellPlace.of(grid, spot);
             table.row(
                     String.valueOf(spot.layer() + 1),
                     String.valueOf(spot.row() + 1),
                     String.valueOf(spot.column() + 1),
-                    String.format(Locale.ROOT, "%.1f", grid.mapX(x, y)),
-                    String.format(Locale.ROOT, "%.1f", grid.mapY(x, y)),
+                    String.format(Locale.ROOT, "%.1f", place.x()),
+                    String.format(Locale.ROOT, "%.1f", place.y()),
                     Figures.shown(spot.imbalance() * factor),
                     Figures.percent(100 * spot.imbalance() / throughput));
         }

@@ -5,11 +5,12 @@ import org.seepledger.picture.Ink;
 import org.seepledger.picture.Palette;
 
 /** The style sheet of inks: each has a variable, which a dark page sets anew, and classes for filling and outline. */
-final class InkStyle {
+public final class InkStyle {
 
     private InkStyle() {}
 
-    static String css() {
+    /** {@return the style sheet that a page with pictures needs} */
+    public static String css() {
         StringBuilder css = new StringBuilder();
         css.append(":root{color-scheme:light dark;")
                 .append(variables(Palette.LIGHT))

@@ -3,12 +3,17 @@ package org.seepledger.unit;
 import java.math.BigDecimal;
 import java.math.MathContext;
 import java.util.Locale;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
+import java.util.stream.Collectors;
 
 /** Numbers as people read them. */
 public final class Figures {
 
     private static final double SMALL = 1e-4;
     private static final double LARGE = 1e12;
+    private static final Pattern POWER_OF_TEN = Pattern.compile("e([+-]\\d+)");
+    private static final String RAISED = "⁰¹²³⁴⁵⁶⁷⁸⁹";
 
     private Figures() {}
 
@@ -48,11 +53,36 @@ public final class Figures {
 
     /**
      * {@return a number for page and window: four significant digits, a true minus, thousands kept apart by a narrow space
-     * that no line breaks at, and a dash where there is none}
+     * that no line breaks at, powers of ten raised, and a dash where there is none}
      *
      * @param value the number
      */
     public static String typeset(double value) {
-        return Double.isNaN(value) ? "–" : shown(value).replace('-', '−').replace(' ', '\u202f');
+        return typeset(shown(value));
+    }
+
+    /**
+     * {@return a percentage for page and window, in the same way}
+     *
+     * @param value in percent
+     */
+    public static String typesetPercent(double value) {
+        return typeset(percent(value));
+    }
+
+    private static String typeset(String shown) {
+        if (shown.equals("-")) {
+            return "–";
+        }
+        Matcher power = POWER_OF_TEN.matcher(shown);
+        String raised = power.replaceAll(found -> "·10" + raised(Integer.parseInt(found.group(1))));
+        return raised.replace('-', '−').replace(' ', '\u202f');
+    }
+
+    private static String raised(int exponent) {
+        return String.valueOf(exponent)
+                .chars()
+                .mapToObj(sign -> sign == '-' ? "⁻" : RAISED.substring(sign - '0', sign - '0' + 1))
+                .collect(Collectors.joining());
     }
 }

@@ -19,7 +19,7 @@ import org.junit.jupiter.params.provider.ValueSource;
 class OutputFolderTest {
 
     private static final String[] FILES = {
-        "budget.csv", "exchange.csv", "faces.geojson", "imbalance_l1.tif", "imbalance_l2.tif", "run.json"
+        "budget.csv", "exchange.csv", "faces.geojson", "imbalance_l1.tif", "imbalance_l2.tif", "report.html", "run.json"
     };
 
     @TempDir
@@ -161,6 +161,7 @@ class OutputFolderTest {
                         "imbalance_l1.tif",
                         "imbalance_l2.tif",
                         "mine.txt",
+                        "report.html",
                         "run.json");
         assertThat(files.out().resolve("mine.txt")).hasContent("mine");
     }
@@ -171,7 +172,8 @@ class OutputFolderTest {
         succeeded(files.balance());
         succeeded(files.with("layers", "[{'top': 10, 'bottom': 0}]").balance("--overwrite"));
         assertThat(AquiferFiles.names(files.out()))
-                .containsExactly("budget.csv", "exchange.csv", "faces.geojson", "imbalance_l1.tif", "run.json");
+                .containsExactly(
+                        "budget.csv", "exchange.csv", "faces.geojson", "imbalance_l1.tif", "report.html", "run.json");
     }
 
     @Test

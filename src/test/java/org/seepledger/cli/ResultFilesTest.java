@@ -206,7 +206,13 @@ class ResultFilesTest {
                 .containsExactly("aquifer.json", "h.csv", files.prisms().toString(), periods.toString());
         assertHash(run.get("inputs").get(1), files.aquifer().resolve("h.csv"));
         assertThat(names(run.get("outputs")))
-                .containsExactly("budget.csv", "exchange.csv", "faces.geojson", "imbalance_l1.tif", "imbalance_l2.tif");
+                .containsExactly(
+                        "budget.csv",
+                        "exchange.csv",
+                        "faces.geojson",
+                        "imbalance_l1.tif",
+                        "imbalance_l2.tif",
+                        "report.html");
         for (JsonNode output : run.get("outputs")) {
             assertHash(output, files.out().resolve(output.get("name").asText()));
         }

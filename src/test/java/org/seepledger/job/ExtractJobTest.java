@@ -7,6 +7,7 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
+import java.time.LocalDate;
 import java.util.List;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
@@ -134,7 +135,8 @@ class ExtractJobTest {
                         WellRule.POINT,
                         true,
                         2,
-                        false),
+                        false,
+                        ReportRequest.dated(LocalDate.of(2024, 5, 31))),
                 Progress.NONE);
         return Rows.text(out.resolve("budget.csv"));
     }

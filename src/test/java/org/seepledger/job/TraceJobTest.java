@@ -8,6 +8,7 @@ import com.fasterxml.jackson.databind.ObjectMapper;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.time.LocalDate;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -75,7 +76,8 @@ class TraceJobTest {
                         WellRule.POINT,
                         true,
                         1,
-                        false),
+                        false,
+                        ReportRequest.dated(LocalDate.of(2024, 5, 31))),
                 Progress.NONE);
         int traced = 0;
         for (CSVRecord row : Rows.of(folder.resolve("budget/budget.csv"))) {

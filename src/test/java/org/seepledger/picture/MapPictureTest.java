@@ -18,6 +18,7 @@ import org.seepledger.prism.Shapes;
 
 class MapPictureTest {
 
+    private static final UnitShown RATE = new UnitShown("m3/d", 1, true);
     private static final double WIDTH = 720;
 
     /** Sides 1 to 4 are south, east, north and west. */
@@ -25,15 +26,7 @@ class MapPictureTest {
 
     private static Picture map(Map<String, Double> flows) {
         return MapPicture.ofFaces(
-                PRISM,
-                List.of(),
-                List.of(),
-                Optional.empty(),
-                Optional.empty(),
-                Scene.budget(flows),
-                0.1,
-                "m3/d",
-                WIDTH);
+                PRISM, List.of(), List.of(), Optional.empty(), Optional.empty(), Scene.budget(flows), RATE, WIDTH);
     }
 
     private static Map<String, Double> flows(double south, double east, double north, double west) {
@@ -99,8 +92,7 @@ class MapPictureTest {
                 Optional.empty(),
                 Optional.of(SectionLine.through(round, Scene.GRID)),
                 Scene.budget(flows),
-                0.1,
-                "m3/d",
+                RATE,
                 WIDTH);
         List<Box> labels = Scene.texts(map).stream()
                 .filter(text -> text.words().startsWith("side") || text.words().equals("W1"))

@@ -22,6 +22,7 @@ import org.seepledger.prism.VerticalRange;
 
 class SectionPictureTest {
 
+    private static final UnitShown RATE = new UnitShown("m3/d", 1, true);
     private static final Prism BOX = Prisms.of("a", 0, 1, Shapes.box(1060, 2050, 1240, 2150));
 
     private static double inside(Profile profile) {
@@ -96,8 +97,7 @@ class SectionPictureTest {
                         BOX,
                         new SectionLine(1020, 2100, 1280, 2100),
                         Scene.budget(Map.of("lid:top", 12.5, "lid:bottom", -40.0)),
-                        0.1,
-                        "m3/d",
+                        RATE,
                         720)
                 .orElseThrow();
         assertThat(Scene.texts(section))
@@ -125,7 +125,7 @@ class SectionPictureTest {
                 full.timeUnit());
         SectionLine line = SectionLine.through(BOX, Scene.GRID);
         Prism one = new Prism("a", BOX.rings(), new VerticalRange.Layers(0, 0));
-        assertThat(SectionPicture.of(empty, one, line, Scene.budget(Map.of()), 1, "m3/d", 720))
+        assertThat(SectionPicture.of(empty, one, line, Scene.budget(Map.of()), RATE, 720))
                 .isEmpty();
     }
 }

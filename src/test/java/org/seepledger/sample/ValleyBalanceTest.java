@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import java.io.IOException;
 import java.nio.file.Path;
+import java.time.LocalDate;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.IntStream;
@@ -24,6 +25,7 @@ import org.seepledger.io.aquifer.AquiferReader;
 import org.seepledger.job.BalanceJob;
 import org.seepledger.job.BalanceOutcome;
 import org.seepledger.job.BalanceRequest;
+import org.seepledger.job.ReportRequest;
 import org.seepledger.progress.Progress;
 
 /** An independent solution, given as heads and conductivity: the program finds its face flows again, and it closes. */
@@ -104,7 +106,8 @@ class ValleyBalanceTest {
                 WellRule.POINT,
                 false,
                 1,
-                false);
+                false,
+                ReportRequest.dated(LocalDate.of(2024, 5, 31)));
         BalanceOutcome outcome = BalanceJob.run(request, Progress.NONE);
         // In percent: a hundred times stricter than 1e-8 of throughput.
         assertThat(outcome.worstClosureError()).isLessThan(1e-8);

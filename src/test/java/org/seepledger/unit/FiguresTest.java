@@ -26,4 +26,13 @@ class FiguresTest {
     void onPageAndWindowHaveATrueMinusAndDoNotBreak() {
         assertThat(Figures.typeset(-12345.6)).isEqualTo("−12\u202f350");
     }
+
+    @Test
+    void onPageAndWindowRaisePowersOfTen() {
+        assertThat(Figures.typeset(-1.23456e-7)).isEqualTo("−1.235·10⁻⁷");
+        assertThat(Figures.typeset(1.5e15)).isEqualTo("1.500·10¹⁵");
+        assertThat(Figures.typesetPercent(-3e-13)).isEqualTo("−3·10⁻¹³\u202f%");
+        assertThat(Figures.typesetPercent(20.318)).isEqualTo("20.32\u202f%");
+        assertThat(Figures.typesetPercent(Double.NaN)).isEqualTo("–");
+    }
 }

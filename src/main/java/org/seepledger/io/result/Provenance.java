@@ -1,5 +1,7 @@
 package org.seepledger.io.result;
 
+import java.util.OptionalDouble;
+
 /**
  * Where a term comes from, as the set says.
  *
@@ -9,6 +11,21 @@ package org.seepledger.io.result;
  * @param uncertainty one standard deviation as {@code 20 %} or an absolute value; empty if not said
  */
 public record Provenance(String term, String origin, String reference, String uncertainty) {
+
+    private static final String PERCENT = " %";
+
+    /** {@return the stated standard deviation in percent; empty if none or an absolute one is stated} */
+    public OptionalDouble percent() {
+        return uncertainty.endsWith(PERCENT)
+                ? OptionalDouble.of(
+                        Double.parseDouble(uncertainty.substring(0, uncertainty.length() - PERCENT.length())))
+                : OptionalDouble.empty();
+    }
+
+    /** {@return whether it was computed so that the budget closes} */
+    public boolean byDifference() {
+        return origin.equals("by difference");
+    }
 
     /** {@return the sentence that stands in exports} */
     @Override

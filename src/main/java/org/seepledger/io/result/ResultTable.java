@@ -4,8 +4,6 @@ import java.io.IOException;
 import java.io.Writer;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.time.LocalDateTime;
-import java.time.format.DateTimeFormatter;
 import java.util.List;
 import org.apache.commons.csv.CSVFormat;
 import org.apache.commons.csv.CSVPrinter;
@@ -44,17 +42,12 @@ final class ResultTable implements AutoCloseable {
     void span(Period period, Times times) throws IOException {
         rows.print(CsvText.number(period.from()));
         rows.print(CsvText.number(period.to()));
-        rows.print(times.date(period.from()).map(ResultTable::iso).orElse(""));
-        rows.print(times.date(period.to()).map(ResultTable::iso).orElse(""));
+        rows.print(times.isoDate(period.from()).orElse(""));
+        rows.print(times.isoDate(period.to()).orElse(""));
     }
 
     void endRow() throws IOException {
         rows.println();
-    }
-
-    private static String iso(LocalDateTime date) {
-        boolean midnight = date.equals(date.toLocalDate().atStartOfDay());
-        return midnight ? date.toLocalDate().toString() : DateTimeFormatter.ISO_LOCAL_DATE_TIME.format(date);
     }
 
     @Override

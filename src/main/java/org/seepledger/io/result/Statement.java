@@ -15,10 +15,13 @@ import org.seepledger.ledger.Disclaimer;
  */
 public record Statement(String title, List<FileRecord> inputs, List<Provenance> origins, List<String> warnings) {
 
-    private static final String METHOD = "Method: face flows of each cell as a lowest-order Raviart-Thomas field,"
+    /** How it was worked out, in a sentence. */
+    public static final String METHOD = "Method: face flows of each cell as a lowest-order Raviart-Thomas field,"
             + " integrated exactly along the polygon's sides and lids; gross in and out are kept per boundary piece,"
             + " cell, well and interval.";
-    private static final String SIGNS = "Signs: inflow and outflow are never negative; net = inflow - outflow; release"
+
+    /** What signs and totals mean. */
+    public static final String SIGNS = "Signs: inflow and outflow are never negative; net = inflow - outflow; release"
             + " from storage counts as inflow, uptake as outflow; storage change = uptake - release;"
             + " residual = inflow - outflow - storage change; closure error = 100 x residual / throughput.";
 

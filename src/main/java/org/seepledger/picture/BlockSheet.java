@@ -1,0 +1,205 @@
+package org.seepledger.picture;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.seepledger.picture.Mark.Anchor;
+import org.seepledger.picture.Mark.Fill;
+import org.seepledger.picture.Mark.Stroke;
+
+/**
+ * Draws blocks in three columns. Where there is room, the pieces' names and numbers stand beside them; on narrow pages keys
+ * do, and a list below says what they stand for.
+ */
+final class BlockSheet {
+
+    private static final double BESIDE_FROM = 600;
+    private static final double MARGIN = 6;
+    private static final double TOP = 46;
+    private static final double NAME = 12;
+    private static final double FIGURE = 11.5;
+    private static final double LIST_LINE = 17;
+    private static final double VISIBLE = 0.8;
+
+    private final double width;
+    private final boolean beside;
+    private final double column;
+    private final double block;
+    private final double top;
+    private final double base;
+    private final double lowest;
+    private final double scale;
+    private final List<Mark> guides = new ArrayList<>();
+    private final List<Mark> marks = new ArrayList<>();
+    private final List<Mark> list = new ArrayList<>();
+    private double listEnd;
+    private int keys;
+
+    BlockSheet(double width, double lowest, double highest) {
+        this.width = width;
+        this.beside = width >= BESIDE_FROM;
+        this.column = (width - 2 * MARGIN) / 3;
+        this.block = beside ? 0.34 * column : column - 34;
+        this.top = TOP;
+        double high = beside ? 270 : 200;
+        this.lowest = lowest;
+        this.scale = high / (highest - lowest);
+        this.base = top + high;
+        this.listEnd = base + 14;
+    }
+
+    /** {@return the y of a level} */
+    private double y(double level) {
+        return base - (level - lowest) * scale;
+    }
+
+    private double left(int index) {
+        return MARGIN + index * column;
+    }
+
+    private void head(int index, String title, String figure) {
+        double x = left(index);
+        marks.add(Mark.Text.of(x, 16, title, 14, Anchor.START).strong());
+        marks.add(Mark.Text.of(x, 34, Lettering.fitted(figure, 13, column - 4), 13, Anchor.START));
+    }
+
+    void column(int index, String title, String figure, List<Block> pieces) {
+        head(index, title, figure);
+        double x = left(index);
+        List<Double> middles = new ArrayList<>();
+        for (Block piece : pieces) {
+            middles.add(draw(piece, x, block));
+        }
+        outline(x, block, y(0), pieces.isEmpty() ? y(0) : y(pieces.get(0).from()));
+        label(index, title, pieces, middles, block);
+    }
+
+    /** Draws what lies between the height of the losses and that of the gains. */
+    void bridge(double gains, double losses, List<Block> pieces, boolean open) {
+        double x = left(2);
+        double storageWidth = open ? block : 0.62 * block;
+        guide(left(0) + block, x + block, gains);
+        guide(left(1) + block, x + storageWidth, losses);
+        List<Double> middles = new ArrayList<>();
+        if (open) {
+            head(2, "Storage", "–");
+            middles.add(openBlock(pieces.get(0), x));
+        } else {
+            head(2, "Storage", pieces.get(0).name().replace("storage ", "") + " " + pieces.get(0).figure());
+            middles.add(draw(pieces.get(0), x, storageWidth));
+            outline(x, storageWidth, y(pieces.get(0).from()), y(pieces.get(0).to()));
+            double beyond = x + storageWidth + 3;
+            middles.add(draw(pieces.get(1), beyond, block - storageWidth - 3));
+            outline(beyond, block - storageWidth - 3, y(pieces.get(1).from()), y(pieces.get(1).to()));
+        }
+        label(2, "Storage and residual", pieces, middles, storageWidth);
+        marks.add(line(MARGIN, y(0), width - MARGIN, y(0), Stroke.of(Ink.Token.TEXT, 1)));
+    }
+
+    private void guide(double from, double to, double level) {
+        guides.add(line(from, y(level), to, y(level), Stroke.of(Ink.Token.MUTED, 0.8).dashed(3.0, 3.0)));
+    }
+
+    private static Mark.Line line(double fromX, double fromY, double toX, double toY, Stroke stroke) {
+        return new Mark.Line(new double[] {fromX, fromY, toX, toY}, stroke);
+    }
+
+    /** {@return the y of the piece's middle} */
+    private double draw(Block piece, double x, double wide) {
+        double upper = Math.min(y(piece.from()), y(piece.to()));
+        double high = Math.abs(y(piece.from()) - y(piece.to()));
+        if (high < VISIBLE) {
+            double middle = upper + high / 2;
+            marks.add(line(x, middle, x + wide, middle, Stroke.of(piece.ink(), 2)));
+            return middle;
+        }
+        marks.add(Mark.Area.of(new Box(x, upper, wide, high), new Fill(piece.ink(), 1, piece.texture())));
+        if (high > 4) {
+            marks.add(line(x, upper, x + wide, upper, Stroke.of(Ink.Token.PAPER, 1.4)));
+        }
+        return upper + high / 2;
+    }
+
+    private void outline(double x, double wide, double one, double other) {
+        if (Math.abs(one - other) >= VISIBLE) {
+            Box box = new Box(x, Math.min(one, other), wide, Math.abs(one - other));
+            marks.add(new Mark.Area(
+                    List.of(box.ring()), Optional.empty(), Optional.of(Stroke.of(Ink.Token.TEXT, 1))));
+        }
+    }
+
+    private double openBlock(Block gap, double x) {
+        double upper = Math.min(y(gap.from()), y(gap.to()));
+        double high = Math.max(2, Math.abs(y(gap.from()) - y(gap.to())));
+        marks.add(new Mark.Area(
+                List.of(new Box(x, upper, block, high).ring()),
+                Optional.empty(),
+                Optional.of(Stroke.of(gap.ink(), 1.6).dashed(5.0, 4.0))));
+        return upper + high / 2;
+    }
+
+    private void label(int index, String title, List<Block> pieces, List<Double> middles, double firstWidth) {
+        double half = beside ? 14 : 7;
+        double[] wanted = middles.stream().mapToDouble(middle -> middle).toArray();
+        double x = left(index) + block;
+        double[] places = Spread.out(wanted, 2 * half, top + half - 4, base - half);
+        if (!beside && !pieces.isEmpty()) {
+            listTitle(title);
+        }
+        for (int i = 0; i < places.length; i++) {
+            double from = left(index) + (i == 0 ? firstWidth : block) + 1;
+            double[] leader = {from, wanted[i], x + 5, wanted[i], x + 11, places[i], x + 14, places[i]};
+            marks.add(new Mark.Line(leader, Stroke.of(Ink.Token.MUTED, 0.8)));
+            if (beside) {
+                writeBeside(pieces.get(i), x + 17, places[i], left(index) + column - 4);
+            } else {
+                writeKey(pieces.get(i), x + 16, places[i]);
+            }
+        }
+    }
+
+    private void writeBeside(Block piece, double x, double middle, double right) {
+        String name = Lettering.fitted(piece.name(), NAME, right - x);
+        marks.add(Mark.Text.of(x, middle - 2, name, NAME, Anchor.START).haloed());
+        String numbers = piece.figure() + (piece.share().isEmpty() ? "" : " · " + piece.share());
+        marks.add(Mark.Text.of(x, middle + 11, Lettering.fitted(numbers, FIGURE, right - x), FIGURE, Anchor.START)
+                .haloed()
+                .in(Ink.Token.MUTED));
+    }
+
+    private void listTitle(String title) {
+        listEnd += LIST_LINE + 2;
+        list.add(Mark.Text.of(MARGIN, listEnd, title, NAME, Anchor.START).strong());
+    }
+
+    private void writeKey(Block piece, double x, double middle) {
+        String key = String.valueOf(++keys);
+        marks.add(Mark.Text.of(x, middle + 4, key, NAME, Anchor.START).haloed());
+        listEnd += LIST_LINE;
+        double right = width - MARGIN;
+        list.add(Mark.Text.of(MARGIN + 18, listEnd, key, NAME, Anchor.END).in(Ink.Token.MUTED));
+        list.add(Mark.Text.of(right, listEnd, piece.share(), NAME, Anchor.END).in(Ink.Token.MUTED));
+        list.add(Mark.Text.of(right - 54, listEnd, piece.figure(), NAME, Anchor.END));
+        double room = right - 60 - Lettering.width(piece.figure(), NAME) - MARGIN - 26;
+        list.add(Mark.Text.of(
+                MARGIN + 26, listEnd, Lettering.fitted(piece.name(), NAME, room), NAME, Anchor.START));
+    }
+
+    /** Adds a paragraph below all else. */
+    void words(String words) {
+        Paragraph paragraph = new Paragraph(words, NAME, width - 2 * MARGIN);
+        list.addAll(paragraph.marks(MARGIN, listEnd + 8, Ink.Token.TEXT));
+        listEnd += 8 + paragraph.height();
+    }
+
+    double height() {
+        return Math.ceil(listEnd + 6);
+    }
+
+    List<Mark> marks() {
+        List<Mark> all = new ArrayList<>(guides);
+        all.addAll(marks);
+        all.addAll(list);
+        return all;
+    }
+}

@@ -1,0 +1,69 @@
+package org.seepledger.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import org.seepledger.ledger.Totals;
+
+/** Whether a budget closes, in words. */
+final class ClosureWords {
+
+    /** From this share of throughput on, gross flow that is no net flow is worth a sentence. */
+    private static final double THROUGH_FLOW = 0.1;
+
+    private final PrismResult result;
+    private final Wording wording;
+    private final Totals totals;
+    private final double time;
+
+    ClosureWords(PrismResult result, Wording wording) {
+        this.result = result;
+        this.wording = wording;
+        this.totals = result.record().totals();
+        this.time = result.record().period().duration();
+    }
+
+    List<String> sentences() {
+        List<String> sentences = new ArrayList<>();
+        sentences.addAll(inShort());
+        if (result.storageKnown() && totals.throughput() > 0) {
+            addThroughFlow(sentences);
+        }
+        return sentences;
+    }
+
+    /** The closure over the record, and that of the worst period where there are several. */
+    List<String> inShort() {
+        List<String> sentences = new ArrayList<>();
+        sentences.add(overTheRecord());
+        result.worstPeriod()
+                .ifPresent(
+                        worst -> sentences.add("Worst period: " + worst.period().name() + ", "
+                                + wording.percent(worst.totals().closureError()) + "."));
+        return sentences;
+    }
+
+    private String overTheRecord() {
+        if (!result.storageKnown()) {
+            return "Closure cannot be judged: change in storage is not known. Inflow less outflow, storage included, is "
+                    + wording.rate(totals.inflow() - totals.outflow(), time) + ".";
+        }
+        if (totals.throughput() == 0) {
+            return "Nothing flows: there is nothing to close.";
+        }
+        return (result.closesToRounding() ? "Closes to rounding: closure error " : "Closure error ")
+                + wording.percent(totals.closureError()) + " of throughput ("
+                + wording.percent(totals.netClosureError()) + " of net flow): "
+                + wording.rate(totals.residual(), time) + " of "
+                + wording.rate(totals.throughput(), time) + " is unexplained.";
+    }
+
+    private void addThroughFlow(List<String> sentences) {
+        double through = totals.throughput() - totals.netThroughput();
+        if (through >= THROUGH_FLOW * totals.throughput()) {
+            sentences.add("Of that throughput, "
+                    + wording.percent(100 * through / totals.throughput())
+                    + " goes in and out through the same items or at different times, and would be less or more if sides"
+                    + " were drawn otherwise. Set against net flow, the closure error does not depend on it.");
+        }
+    }
+}

@@ -1,0 +1,47 @@
+package org.seepledger.report;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.function.ToDoubleFunction;
+
+/** What a budget's gains and losses are made of, in words. */
+final class DominanceWords {
+
+    private static final int NAMED = 3;
+
+    private final PrismResult result;
+    private final Wording wording;
+
+    DominanceWords(PrismResult result, Wording wording) {
+        this.result = result;
+        this.wording = wording;
+    }
+
+    List<String> sentences() {
+        List<String> sentences = new ArrayList<>();
+        add(sentences, "gains", Term::inflow);
+        add(sentences, "losses", Term::outflow);
+        return sentences;
+    }
+
+    private void add(List<String> sentences, String what, ToDoubleFunction<Term> volume) {
+        List<Term> terms = result.terms().stream()
+                .filter(term -> term.quantified() && volume.applyAsDouble(term) > 0)
+                .sorted(Comparator.comparingDouble(term -> -volume.applyAsDouble(term)))
+                .toList();
+        double all = terms.stream().mapToDouble(volume).sum();
+        double time = result.record().period().duration();
+        if (terms.isEmpty()) {
+            sentences.add("There are no " + what + ".");
+            return;
+        }
+        List<String> largest = terms.stream()
+                .limit(NAMED)
+                .map(term -> term.name() + " (" + wording.rate(volume.applyAsDouble(term), time) + ", "
+                        + wording.percent(100 * volume.applyAsDouble(term) / all) + ")")
+                .toList();
+        sentences.add("Of all " + what + ", " + wording.rate(all, time) + " gross, the largest "
+                + (largest.size() == 1 ? "is " : "are ") + Wording.listed(largest) + ".");
+    }
+}

@@ -1,0 +1,44 @@
+package org.seepledger.report.page;
+
+import static j2html.TagCreator.article;
+import static j2html.TagCreator.dd;
+import static j2html.TagCreator.div;
+import static j2html.TagCreator.dl;
+import static j2html.TagCreator.dt;
+import static j2html.TagCreator.each;
+import static j2html.TagCreator.h2;
+import static j2html.TagCreator.h3;
+import static j2html.TagCreator.p;
+import static j2html.TagCreator.section;
+
+import j2html.tags.DomContent;
+import java.util.ArrayList;
+import java.util.List;
+import org.seepledger.report.Answer;
+import org.seepledger.report.PrismResult;
+
+/** The answer in sentences, for each prism. */
+final class AnswerSection {
+
+    private AnswerSection() {}
+
+    static DomContent of(Report report) {
+        return section(
+                        h2("The answer"),
+                        p("Rates are means over the whole record, " + report.span(report.record()) + "."),
+                        each(report.results(), result -> of(report, result)))
+                .withId("answer");
+    }
+
+    private static DomContent of(Report report, PrismResult result) {
+        Answer answer = Answer.of(result, report.origins(), report.wording());
+        List<DomContent> topics = new ArrayList<>();
+        for (Answer.Topic topic : Answer.Topic.values()) {
+            List<String> sentences = answer.on(topic).toList();
+            if (!sentences.isEmpty()) {
+                topics.add(div(dt(topic.question()), dd(each(sentences, sentence -> p(sentence)))));
+            }
+        }
+        return article(h3(result.prism()), dl(topics.toArray(DomContent[]::new)).withClass("answer"));
+    }
+}
