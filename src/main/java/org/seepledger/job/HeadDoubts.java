@@ -7,7 +7,7 @@ import org.seepledger.aquifer.GriddedValues;
 import org.seepledger.aquifer.Layer;
 import org.seepledger.aquifer.Window;
 import org.seepledger.io.table.StepKind;
-import org.seepledger.report.Figures;
+import org.seepledger.unit.Figures;
 
 /**
  * Doubts whether heads and layer surfaces are in one unit and refer to one datum: where the water table lies in a layer,

@@ -9,7 +9,7 @@ import org.seepledger.aquifer.Window;
 import org.seepledger.io.aquifer.Quantity;
 import org.seepledger.io.table.StepKind;
 import org.seepledger.progress.Progress;
-import org.seepledger.report.Figures;
+import org.seepledger.unit.Figures;
 import org.seepledger.report.ValueRange;
 import org.seepledger.unit.Measure;
 
