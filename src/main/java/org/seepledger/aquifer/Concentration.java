@@ -12,8 +12,7 @@ import org.seepledger.unit.Measure;
  * @param limit the detection limit, mass/length³; empty where none is given, or values below it are values all the same
  * @param unit the unit that they were given in
  */
-public record Concentration(
-        GriddedValues values, GriddedValues marks, Optional<GriddedValues> limit, Measure unit) {
+public record Concentration(GriddedValues values, GriddedValues marks, Optional<GriddedValues> limit, Measure unit) {
 
     /**
      * What stands in a block at an instant.

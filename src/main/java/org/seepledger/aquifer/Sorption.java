@@ -51,16 +51,13 @@ public sealed interface Sorption {
         if (this instanceof Freundlich freundlich) {
             double[] kf = block.read(freundlich.kf, 0);
             double[] exponent = block.read(freundlich.exponent, 0);
-            return (cell, c) -> density[cell]
-                    * MG_PER_KG
-                    * kf[cell]
-                    * Math.pow(c * freundlich.perLength3, exponent[cell]);
+            return (cell, c) ->
+                    density[cell] * MG_PER_KG * kf[cell] * Math.pow(c * freundlich.perLength3, exponent[cell]);
         }
         Langmuir langmuir = (Langmuir) this;
         double[] capacity = block.read(langmuir.capacity, 0);
         double[] affinity = block.read(langmuir.affinity, 0);
-        return (cell, c) ->
-                density[cell] * capacity[cell] * (affinity[cell] * c) / (1 + affinity[cell] * c);
+        return (cell, c) -> density[cell] * capacity[cell] * (affinity[cell] * c) / (1 + affinity[cell] * c);
     }
 
     /** One milligram in a kilogram. */

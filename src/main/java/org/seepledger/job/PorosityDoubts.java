@@ -9,8 +9,8 @@ import org.seepledger.aquifer.Window;
 import org.seepledger.io.aquifer.Quantity;
 import org.seepledger.io.table.StepKind;
 import org.seepledger.progress.Progress;
-import org.seepledger.unit.Figures;
 import org.seepledger.report.ValueRange;
+import org.seepledger.unit.Figures;
 import org.seepledger.unit.Measure;
 
 /** Finds cells whose effective porosity is greater than their porosity: water would move through more than the pores. */

@@ -85,19 +85,28 @@ final class BlockSheet {
             head(2, "Storage", "–");
             middles.add(openBlock(pieces.get(0), x));
         } else {
-            head(2, "Storage", pieces.get(0).name().replace("storage ", "") + " " + pieces.get(0).figure());
+            head(
+                    2,
+                    "Storage",
+                    pieces.get(0).name().replace("storage ", "") + " "
+                            + pieces.get(0).figure());
             middles.add(draw(pieces.get(0), x, storageWidth));
             outline(x, storageWidth, y(pieces.get(0).from()), y(pieces.get(0).to()));
             double beyond = x + storageWidth + 3;
             middles.add(draw(pieces.get(1), beyond, block - storageWidth - 3));
-            outline(beyond, block - storageWidth - 3, y(pieces.get(1).from()), y(pieces.get(1).to()));
+            outline(
+                    beyond,
+                    block - storageWidth - 3,
+                    y(pieces.get(1).from()),
+                    y(pieces.get(1).to()));
         }
         label(2, "Storage and residual", pieces, middles, storageWidth);
         marks.add(line(MARGIN, y(0), width - MARGIN, y(0), Stroke.of(Ink.Token.TEXT, 1)));
     }
 
     private void guide(double from, double to, double level) {
-        guides.add(line(from, y(level), to, y(level), Stroke.of(Ink.Token.MUTED, 0.8).dashed(3.0, 3.0)));
+        guides.add(line(
+                from, y(level), to, y(level), Stroke.of(Ink.Token.MUTED, 0.8).dashed(3.0, 3.0)));
     }
 
     private static Mark.Line line(double fromX, double fromY, double toX, double toY, Stroke stroke) {
@@ -123,8 +132,7 @@ final class BlockSheet {
     private void outline(double x, double wide, double one, double other) {
         if (Math.abs(one - other) >= VISIBLE) {
             Box box = new Box(x, Math.min(one, other), wide, Math.abs(one - other));
-            marks.add(new Mark.Area(
-                    List.of(box.ring()), Optional.empty(), Optional.of(Stroke.of(Ink.Token.TEXT, 1))));
+            marks.add(new Mark.Area(List.of(box.ring()), Optional.empty(), Optional.of(Stroke.of(Ink.Token.TEXT, 1))));
         }
     }
 
@@ -181,8 +189,7 @@ final class BlockSheet {
         list.add(Mark.Text.of(right, listEnd, piece.share(), NAME, Anchor.END).in(Ink.Token.MUTED));
         list.add(Mark.Text.of(right - 54, listEnd, piece.figure(), NAME, Anchor.END));
         double room = right - 60 - Lettering.width(piece.figure(), NAME) - MARGIN - 26;
-        list.add(Mark.Text.of(
-                MARGIN + 26, listEnd, Lettering.fitted(piece.name(), NAME, room), NAME, Anchor.START));
+        list.add(Mark.Text.of(MARGIN + 26, listEnd, Lettering.fitted(piece.name(), NAME, room), NAME, Anchor.START));
     }
 
     /** Adds a paragraph below all else. */

@@ -50,8 +50,16 @@ public final class BudgetSeries {
         this.bottom = top + (width >= 600 ? 230 : 190);
         this.stripTop = bottom + 50;
         this.end = values.closes() ? stripTop - 4 : stripTop + STRIP;
-        double greatest = IntStream.range(0, values.count()).mapToDouble(values::up).filter(Double::isFinite).max().orElse(0);
-        double least = IntStream.range(0, values.count()).mapToDouble(values::down).filter(Double::isFinite).max().orElse(0);
+        double greatest = IntStream.range(0, values.count())
+                .mapToDouble(values::up)
+                .filter(Double::isFinite)
+                .max()
+                .orElse(0);
+        double least = IntStream.range(0, values.count())
+                .mapToDouble(values::down)
+                .filter(Double::isFinite)
+                .max()
+                .orElse(0);
         this.axis = new ValueAxis(-least, greatest, top, bottom - top);
         double[] residuals = values.closes() ? new double[0] : finite(values.residual());
         this.strip = new ValueAxis(
@@ -60,8 +68,7 @@ public final class BudgetSeries {
                 stripTop,
                 STRIP);
         this.left = 12 + Math.max(axis.labelWidth(false), values.closes() ? 0 : strip.labelWidth(true));
-        this.time = new TimeAxis(
-                budgets.stream().map(PeriodBudget::period).toList(), times, left, width - RIGHT);
+        this.time = new TimeAxis(budgets.stream().map(PeriodBudget::period).toList(), times, left, width - RIGHT);
         this.picture = new Picture(
                 width,
                 end + 26,
@@ -191,7 +198,8 @@ public final class BudgetSeries {
     private String description() {
         String span = budgets.size() == 1
                 ? "In " + budgets.get(0).period().name() + ", in " + unit.words()
-                : "In " + budgets.size() + " periods from " + budgets.get(0).period().name() + " to "
+                : "In " + budgets.size() + " periods from "
+                        + budgets.get(0).period().name() + " to "
                         + budgets.get(budgets.size() - 1).period().name() + ", in " + unit.words();
         return span + ": gains " + range(values.gains()) + ", losses " + range(values.losses()) + ", change in storage "
                 + range(values.storage()) + ", "

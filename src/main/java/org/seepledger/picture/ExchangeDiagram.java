@@ -1,6 +1,5 @@
 package org.seepledger.picture;
 
-import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.stream.Collectors;

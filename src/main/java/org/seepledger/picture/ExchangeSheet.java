@@ -131,8 +131,8 @@ final class ExchangeSheet {
             from, y - half, neck, y - half, neck, y - wing, to, y, neck, y + wing, neck, y + half, from, y + half
         };
         Texture texture = ink == Ink.Token.GAIN ? Texture.RISING : Texture.FALLING;
-        bands.add(new Mark.Area(
-                List.of(ring), Optional.of(new Fill(ink, 1, texture)), Optional.of(Stroke.of(ink, 0.8))));
+        bands.add(
+                new Mark.Area(List.of(ring), Optional.of(new Fill(ink, 1, texture)), Optional.of(Stroke.of(ink, 0.8))));
     }
 
     private double attach(Flow flow, int row, double y) {

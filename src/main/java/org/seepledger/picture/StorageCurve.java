@@ -34,14 +34,15 @@ public final class StorageCurve {
         this.periods = budgets.stream().map(PeriodBudget::period).toList();
         this.unit = unit;
         this.width = width;
-        this.storageKnown =
-                budgets.stream().anyMatch(budget -> !Double.isNaN(budget.totals().storageChange()));
+        this.storageKnown = budgets.stream()
+                .anyMatch(budget -> !Double.isNaN(budget.totals().storageChange()));
         storage.add(0.0);
         residual.add(0.0);
         for (PeriodBudget budget : budgets) {
             Totals totals = budget.totals();
             double change = storageKnown ? unit.of(totals.storageChange(), budget.period()) : 0;
-            double open = unit.of(storageKnown ? totals.residual() : totals.inflow() - totals.outflow(), budget.period());
+            double open =
+                    unit.of(storageKnown ? totals.residual() : totals.inflow() - totals.outflow(), budget.period());
             if (!Double.isFinite(change + open)) {
                 break;
             }
@@ -60,8 +61,7 @@ public final class StorageCurve {
      * @param width in logical pixels, at least 300
      * @throws IllegalArgumentException if the unit is one of rates
      */
-    public static Picture of(
-            String prism, List<PeriodBudget> budgets, Times times, UnitShown unit, double width) {
+    public static Picture of(String prism, List<PeriodBudget> budgets, Times times, UnitShown unit, double width) {
         if (unit.rate()) {
             throw new IllegalArgumentException("rates do not add up through time");
         }
@@ -94,7 +94,8 @@ public final class StorageCurve {
         marks.add(new Mark.Line(curve(residual, time, axis), residualStroke()));
         double bottom = keyEnd + TOP + high;
         time.draw(bottom + 4, width, marks);
-        return new Picture(width, bottom + 28, "Water stored in " + prism + " since the record began", description(), marks);
+        return new Picture(
+                width, bottom + 28, "Water stored in " + prism + " since the record began", description(), marks);
     }
 
     private static Stroke residualStroke() {

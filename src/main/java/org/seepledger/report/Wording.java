@@ -87,9 +87,7 @@ public final class Wording {
      */
     public String unit(Measure unit) {
         String text = unit.toString();
-        return typeset
-                ? text.replaceAll("(?<=[A-Za-z])2\\b", "²").replaceAll("(?<=[A-Za-z])3\\b", "³")
-                : text;
+        return typeset ? text.replaceAll("(?<=[A-Za-z])2\\b", "²").replaceAll("(?<=[A-Za-z])3\\b", "³") : text;
     }
 
     /**
@@ -118,10 +116,12 @@ public final class Wording {
      */
     public static String listed(List<String> names) {
         if (names.size() > NAMES_SHOWN) {
-            return String.join(", ", names.subList(0, NAMES_SHOWN - 1)) + " and "
-                    + (names.size() - NAMES_SHOWN + 1) + " more";
+            return String.join(", ", names.subList(0, NAMES_SHOWN - 1)) + " and " + (names.size() - NAMES_SHOWN + 1)
+                    + " more";
         }
         int last = names.size() - 1;
-        return last < 1 ? String.join("", names) : String.join(", ", names.subList(0, last)) + " and " + names.get(last);
+        return last < 1
+                ? String.join("", names)
+                : String.join(", ", names.subList(0, last)) + " and " + names.get(last);
     }
 }

@@ -73,9 +73,7 @@ class ExtractJobTest {
         Files.writeString(description, Files.readString(description).replaceFirst("\\{", solutes));
         assertSameBudget(set);
         assertThat(folder.resolve("extract/pores.csv")).exists();
-        assertThat(folder.resolve("extract/aquifer.json"))
-                .content()
-                .contains("salt", "pores.csv", "mg/L");
+        assertThat(folder.resolve("extract/aquifer.json")).content().contains("salt", "pores.csv", "mg/L");
         assertThat(folder.resolve("extract/salt.csv")).content().contains("1,<2");
     }
 

@@ -32,7 +32,8 @@ class MannKendallTest {
     @ParameterizedTest
     @CsvSource({"1 2 3 5 4, 0.042", "2 1 3 5 4, 0.117", "1 2 3 4 6 5, 0.0083", "1 2 3 4 5 6 7, 0.0002"})
     void agreesWithTheTable(String series, double oneSided) {
-        assertThat(MannKendall.of(values(series)).probability().orElseThrow() / 2).isCloseTo(oneSided, within(5e-4));
+        assertThat(MannKendall.of(values(series)).probability().orElseThrow() / 2)
+                .isCloseTo(oneSided, within(5e-4));
     }
 
     /** All 1,260 different orders of 3 1 1 2 5 5 4 counted one by one in Python: 0.22857142857142856. */
@@ -100,8 +101,6 @@ class MannKendallTest {
     }
 
     static double[] values(String series) {
-        return Arrays.stream(series.split(" "))
-                .mapToDouble(Double::parseDouble)
-                .toArray();
+        return Arrays.stream(series.split(" ")).mapToDouble(Double::parseDouble).toArray();
     }
 }

@@ -41,8 +41,7 @@ class TrendTest {
         assertThat(interval.high() - fit.rate()).isCloseTo(0.012959092785796912, within(1e-11));
         assertThat(fit.rate() - interval.low()).isCloseTo(0.012959092785796912, within(1e-11));
         assertThat(fit.halfLife().orElseThrow()).isCloseTo(Math.log(2) / 0.07304746491945928, within(1e-11));
-        assertThat(fit.halfLifeInterval().orElseThrow().low())
-                .isCloseTo(Math.log(2) / interval.high(), within(1e-12));
+        assertThat(fit.halfLifeInterval().orElseThrow().low()).isCloseTo(Math.log(2) / interval.high(), within(1e-12));
     }
 
     /** C = C₀ exp(−kt) gives k back, with no doubt left. */
@@ -60,8 +59,7 @@ class TrendTest {
 
     @Test
     void aRateThatMayBeNoneHasAHalfLifeWithoutBound() {
-        FirstOrderRate fit =
-                FirstOrderRate.of(new double[] {0, 1, 2, 3}, new double[] {1, 2, 0.8, 1.1}, 0.95);
+        FirstOrderRate fit = FirstOrderRate.of(new double[] {0, 1, 2, 3}, new double[] {1, 2, 0.8, 1.1}, 0.95);
         assertThat(fit.interval().orElseThrow().low()).isNegative();
         assertThat(fit.halfLifeInterval().orElseThrow().high()).isInfinite();
         FirstOrderRate growing = FirstOrderRate.of(new double[] {0, 1, 2}, new double[] {1, 2, 4}, 0.95);

@@ -92,7 +92,8 @@ public final class AquiferReader {
                 : Optional.empty();
         Storage storage = storage(root.path("storage"), bindings);
         List<Source> sources = new SourcesReader(bindings, length, time, warnings).read(root.path("sources"));
-        List<Solute> solutes = new SolutesReader(bindings, root.path("sources"), length, time).read(root.path("solutes"));
+        List<Solute> solutes =
+                new SolutesReader(bindings, root.path("sources"), length, time).read(root.path("solutes"));
         String name = root.has("name") ? root.get("name").textValue() : folderName;
         Aquifer aquifer = new Aquifer(name, grid, layers, frame.times(), flow, head, storage, sources, length, time);
         warnOfChoices(aquifer);

@@ -80,14 +80,19 @@ record SoluteNode(JsonNode node, String place, String solute, Bindings bindings)
     void requireNone(List<String> keys, String why) {
         for (String key : keys) {
             if (node.has(key)) {
-                throw fault(key, "\"" + key + "\" beside " + why, "what belongs to it alone", "Take one of the two out.");
+                throw fault(
+                        key, "\"" + key + "\" beside " + why, "what belongs to it alone", "Take one of the two out.");
             }
         }
     }
 
     GriddedValues required(String key, Optional<GriddedValues> values, String why) {
         return values.orElseThrow(() -> new DataFault(
-                AquiferReader.FILE, place, "no \"" + key + "\"", "one, since " + why, "Add it; 0 where there is none."));
+                AquiferReader.FILE,
+                place,
+                "no \"" + key + "\"",
+                "one, since " + why,
+                "Add it; 0 where there is none."));
     }
 
     DataFault fault(String key, String found, String expected, String remedy) {

@@ -166,8 +166,8 @@ final class SolutesReader {
     /** Nothing is its own ancestor. */
     private static void requireAncestors(List<Solute> solutes) {
         Map<String, String> parents = new HashMap<>();
-        solutes.forEach(solute ->
-                solute.ancestry().ifPresent(ancestry -> parents.put(solute.name(), ancestry.parent())));
+        solutes.forEach(
+                solute -> solute.ancestry().ifPresent(ancestry -> parents.put(solute.name(), ancestry.parent())));
         for (int i = 0; i < solutes.size(); i++) {
             String name = solutes.get(i).name();
             String ancestor = parents.get(name);

@@ -37,8 +37,7 @@ final class SorptionReader {
     private Sorption read() {
         GriddedValues density = solute.required(
                 "bulk_density",
-                solute.values(
-                        "bulk_density", Measure.of("kg/m3"), massPerLength3, StepKind.NONE, Bounds.NOT_NEGATIVE),
+                solute.values("bulk_density", Measure.of("kg/m3"), massPerLength3, StepKind.NONE, Bounds.NOT_NEGATIVE),
                 "sorbed mass is mass on rock");
         return switch (sorption.node().get("isotherm").textValue()) {
             case "linear" -> linear(density);
@@ -87,11 +86,9 @@ final class SorptionReader {
         String why = "the isotherm is Langmuir's";
         Optional<GriddedValues> capacity = sorption.values(
                 "capacity", Measure.of("mg/kg"), Measure.of("kg/kg"), StepKind.NONE, Bounds.NOT_NEGATIVE);
-        Optional<GriddedValues> affinity = sorption.values(
-                "affinity", Measure.of("L/mg"), length3PerMass, StepKind.NONE, Bounds.NOT_NEGATIVE);
+        Optional<GriddedValues> affinity =
+                sorption.values("affinity", Measure.of("L/mg"), length3PerMass, StepKind.NONE, Bounds.NOT_NEGATIVE);
         return new Sorption.Langmuir(
-                density,
-                sorption.required("capacity", capacity, why),
-                sorption.required("affinity", affinity, why));
+                density, sorption.required("capacity", capacity, why), sorption.required("affinity", affinity, why));
     }
 }

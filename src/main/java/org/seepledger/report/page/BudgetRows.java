@@ -35,7 +35,10 @@ final class BudgetRows {
         List<TrTag> rows = new ArrayList<>();
         if (term.entries().size() == 1) {
             Entry only = term.entries().get(0);
-            rows.add(of(only, Cells.row("").with(text(term.item() + " "), span(layer(only)).withClass("layer"))));
+            rows.add(of(
+                    only,
+                    Cells.row("")
+                            .with(text(term.item() + " "), span(layer(only)).withClass("layer"))));
             return rows;
         }
         rows.add(amounts(Cells.row(term.item()), term.inflow(), term.outflow())
@@ -96,8 +99,6 @@ final class BudgetRows {
 
     private DomContent share(Total total, double value) {
         double throughput = budget.totals().throughput();
-        return total.isPercentage()
-                ? td()
-                : Cells.share(throughput == 0 ? Double.NaN : 100 * value / throughput);
+        return total.isPercentage() ? td() : Cells.share(throughput == 0 ? Double.NaN : 100 * value / throughput);
     }
 }

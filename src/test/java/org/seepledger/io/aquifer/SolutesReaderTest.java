@@ -54,7 +54,14 @@ class SolutesReaderTest {
 
     /** 1 mg/L is 1e-3 kg/m³; a cubic foot is 0.3048³ m³ (NIST Handbook 44, Appendix C). */
     @ParameterizedTest
-    @CsvSource({"m, mg/L, 1e-3", "m, ug/L, 1e-6", "m, µg/L, 1e-6", "m, ng/L, 1e-9", "m, g/m3, 1e-3", "ft, mg/L, 2.8316846592e-5"})
+    @CsvSource({
+        "m, mg/L, 1e-3",
+        "m, ug/L, 1e-6",
+        "m, µg/L, 1e-6",
+        "m, ng/L, 1e-9",
+        "m, g/m3, 1e-3",
+        "ft, mg/L, 2.8316846592e-5"
+    })
     void turnsConcentrationsIntoKilograms(String length, String unit, double factor) {
         Solute salt = salt(length, unit, "'concentration': 5, 'boundary_concentration': 7");
         assertThat(first(salt.concentration().orElseThrow().values())).isCloseTo(5 * factor, within(1e-15 * factor));
@@ -89,21 +96,27 @@ class SolutesReaderTest {
         assertThatThrownBy(() -> read("", "1,1,1,2", "1,2,1,-2"))
                 .isInstanceOf(DataFault.class)
                 .hasMessageContaining("solutes[0].concentration, layer 1, row 1, column 2: found -2.0");
-        assertThatThrownBy(() -> read("", "1,1,1,<x")).hasMessageContaining("line 2").hasMessageContaining("after <");
-        assertThatThrownBy(() -> read("", "1,1,1,<")).hasMessageContaining("line 2").hasMessageContaining("after <");
+        assertThatThrownBy(() -> read("", "1,1,1,<x"))
+                .hasMessageContaining("line 2")
+                .hasMessageContaining("after <");
+        assertThatThrownBy(() -> read("", "1,1,1,<"))
+                .hasMessageContaining("line 2")
+                .hasMessageContaining("after <");
     }
 
     /** ρb Kd C with ρb 1,600 kg/m³, Kd = Koc × foc = 100 × 0.002 L/kg, C 3 g/m³: 0.96 g/m³ of rock. */
     @ParameterizedTest
-    @CsvSource(delimiter = '|', value = {
-        "{'isotherm': 'linear', 'kd': 0.2} | 0.96e-3",
-        "{'isotherm': 'linear', 'kd': 0.2e-3, 'unit': 'm3/kg'} | 0.96e-3",
-        "{'isotherm': 'linear', 'koc': 100, 'foc': 0.002} | 0.96e-3",
-        "{'isotherm': 'freundlich', 'kf': 0.2, 'n': 1} | 0.96e-3",
-        "{'isotherm': 'freundlich', 'kf': 0.2, 'n': 2} | 2.88e-3",
-        "{'isotherm': 'langmuir', 'capacity': 10, 'affinity': 0.5} | 9.6e-3",
-        "{'isotherm': 'langmuir', 'capacity': {'value': 1e-5, 'unit': 'kg/kg'}, 'affinity': {'value': 0.5, 'unit': 'm3/g'}} | 9.6e-3",
-    })
+    @CsvSource(
+            delimiter = '|',
+            value = {
+                "{'isotherm': 'linear', 'kd': 0.2} | 0.96e-3",
+                "{'isotherm': 'linear', 'kd': 0.2e-3, 'unit': 'm3/kg'} | 0.96e-3",
+                "{'isotherm': 'linear', 'koc': 100, 'foc': 0.002} | 0.96e-3",
+                "{'isotherm': 'freundlich', 'kf': 0.2, 'n': 1} | 0.96e-3",
+                "{'isotherm': 'freundlich', 'kf': 0.2, 'n': 2} | 2.88e-3",
+                "{'isotherm': 'langmuir', 'capacity': 10, 'affinity': 0.5} | 9.6e-3",
+                "{'isotherm': 'langmuir', 'capacity': {'value': 1e-5, 'unit': 'kg/kg'}, 'affinity': {'value': 0.5, 'unit': 'm3/g'}} | 9.6e-3",
+            })
     void sorbsByIsotherms(String sorption, double sorbed) {
         Sorption read = salt("m", "mg/L", "'bulk_density': {'value': 1.6, 'unit': 't/m3'}, 'sorption': " + sorption)
                 .sorption()
@@ -114,10 +127,12 @@ class SolutesReaderTest {
     @Test
     void readsDecayOfBothPhases() {
         double half = Math.log(2) / 20;
-        Solute.Decay both = salt("m", "mg/L", "'half_life': {'value': 480, 'unit': 'h'}").decay();
+        Solute.Decay both =
+                salt("m", "mg/L", "'half_life': {'value': 480, 'unit': 'h'}").decay();
         assertThat(first(both.dissolved().orElseThrow())).isCloseTo(half, within(1e-16));
         assertThat(first(both.sorbed().orElseThrow())).isCloseTo(half, within(1e-16));
-        Solute.Decay dissolved = salt("m", "mg/L", "'decay_rate': 0.1, 'sorbed_half_life': null").decay();
+        Solute.Decay dissolved =
+                salt("m", "mg/L", "'decay_rate': 0.1, 'sorbed_half_life': null").decay();
         assertThat(first(dissolved.dissolved().orElseThrow())).isEqualTo(0.1);
         assertThat(dissolved.sorbed()).isEmpty();
         assertThat(salt("m", "mg/L", "'half_life': null").decay()).isEqualTo(Solute.Decay.NONE);
