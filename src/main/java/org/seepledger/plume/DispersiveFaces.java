@@ -11,7 +11,7 @@ import org.seepledger.aquifer.Window;
 
 /**
  * Dispersive flow through the faces of a block of cells: −(α|q| + θ τ D) ∇C with the full tensor of Burnett and Frind
- * (1987, Water Resources Research 23, 683–694), written with specific discharge q, since effective porosity × (α q/effective
+ * (1987, Water Resources Research 23, 695–705), written with specific discharge q, since effective porosity × (α q/effective
  * porosity) is α q: along x
  *
  * <pre>

@@ -2,7 +2,9 @@ package org.seepledger.plume;
 
 import java.util.List;
 import java.util.Map;
+import java.util.function.ToDoubleFunction;
 import org.seepledger.aquifer.Solute;
+import org.seepledger.aquifer.Times;
 import org.seepledger.ledger.Ledger;
 
 /**
@@ -32,6 +34,27 @@ public record Plume(
     /** {@return the budget to show} */
     public Ledger ledger() {
         return ledgers.get(NonDetects.HALF);
+    }
+
+    /**
+     * {@return something of what is held at a time, between instants in proportion}
+     *
+     * @param times the record's instants
+     * @param time in time units, within the record
+     * @param layer a layer counted from the range's first; the number of its layers for all together
+     * @param what what of it
+     */
+    public double held(Times times, double time, int layer, ToDoubleFunction<Stock> what) {
+        int interval = times.intervalAt(time);
+        double after = (time - times.instant(interval)) / times.length(interval);
+        double start = what.applyAsDouble(stocks.get(interval).get(layer));
+        double end = what.applyAsDouble(stocks.get(interval + 1).get(layer));
+        return after >= 1 ? end : after <= 0 ? start : start + after * (end - start);
+    }
+
+    /** {@return the number of layers in the prism's range} */
+    public int layers() {
+        return stocks.get(0).size() - 1;
     }
 
     /**
