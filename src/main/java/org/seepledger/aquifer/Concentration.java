@@ -10,9 +10,11 @@ import org.seepledger.unit.Measure;
  * @param values mass/length³ at instants; where a value is marked as below a limit, the limit
  * @param marks the limits that single values are marked with, mass/length³; NaN where a value is not marked
  * @param limit the detection limit, mass/length³; empty where none is given, or values below it are values all the same
+ * @param simulated whether the set says that a model computed them
  * @param unit the unit that they were given in
  */
-public record Concentration(GriddedValues values, GriddedValues marks, Optional<GriddedValues> limit, Measure unit) {
+public record Concentration(
+        GriddedValues values, GriddedValues marks, Optional<GriddedValues> limit, boolean simulated, Measure unit) {
 
     /**
      * What stands in a block at an instant.

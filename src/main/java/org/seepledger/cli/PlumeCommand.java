@@ -27,8 +27,8 @@ import picocli.CommandLine.Parameters;
             "  seepledger plume AQUIFER --prisms prisms.geojson --out plume \\",
             "    --every year --rate-unit kg/yr --above \"50 mg/L\"",
             "",
-            "Written to DIR: plume.csv (the budget), mass.csv (what is there at each instant),"
-                    + " run.json (inputs, options, warnings).",
+            "Written to DIR: plume.csv (the budget), mass.csv (what is there at each instant), trend.csv"
+                    + " (where it goes and how it changes), run.json (inputs, options, warnings).",
             "Exit status: 0 done; 1 a fault of the program; 2 the command line is wrong; 3 the data are wrong;",
             "4 done, but a closure error exceeds --max-closure-error."
         })

@@ -22,6 +22,7 @@ import org.seepledger.io.result.MassUnits;
 import org.seepledger.io.result.PlumeCsv;
 import org.seepledger.io.result.RunJson;
 import org.seepledger.io.result.Statement;
+import org.seepledger.io.result.TrendCsv;
 import org.seepledger.ledger.Period;
 import org.seepledger.ledger.PeriodBudget;
 import org.seepledger.plume.Plume;
@@ -145,6 +146,7 @@ public final class PlumeJob {
         try {
             PlumeCsv.write(out.file("plume.csv"), statement, plumes, periods, times, units);
             MassCsv.write(out.file("mass.csv"), statement, plumes, times, units, length, above);
+            TrendCsv.write(out.file("trend.csv"), statement, plumes, times, aquifer.grid(), units, length);
             writeRecord(out, statement, water);
         } catch (IOException e) {
             throw new UsageFault("The results cannot be written beside " + request.out() + " (" + Unreadable.reason(e)

@@ -134,6 +134,30 @@ class PlumeCommandTest {
     }
 
     @Test
+    void tellsTheTrend() throws IOException {
+        done();
+        List<CSVRecord> salt = rows("trend.csv").stream()
+                .filter(row ->
+                        row.get("solute").equals("salt") && row.get("quantity").equals("mass"))
+                .toList();
+        assertThat(salt).filteredOn(row -> row.get("kind").equals("value")).hasSize(3);
+        CSVRecord slope = salt.stream()
+                .filter(row -> row.get("kind").equals("slope"))
+                .findFirst()
+                .orElseThrow();
+        assertThat(Double.parseDouble(slope.get("value"))).isNegative();
+        assertThat(slope.get("unit")).isEqualTo("kg/d");
+        assertThat(salt)
+                .anyMatch(row -> row.get("kind").equals("probability")
+                        && row.get("value").isEmpty()
+                        && row.get("words").equals("none below 5 values"));
+        assertThat(salt)
+                .anyMatch(row -> row.get("kind").equals("first-order rate")
+                        && row.get("words").contains("no rate of degradation"));
+        assertThat(rows("trend.csv")).anyMatch(row -> row.get("quantity").equals("centre x"));
+    }
+
+    @Test
     void booksDispersionByChoice() throws IOException {
         done();
         assertThat(rows("plume.csv")).noneMatch(row -> row.get("group").equals("dispersion"));

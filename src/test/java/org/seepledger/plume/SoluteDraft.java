@@ -97,7 +97,7 @@ final class SoluteDraft {
         return new Solute(
                 name,
                 Optional.of(new Concentration(
-                        concentration, GriddedValues.constant(Double.NaN), limit, Measure.of("mg/L"))),
+                        concentration, GriddedValues.constant(Double.NaN), limit, false, Measure.of("mg/L"))),
                 Optional.of(porosity),
                 Optional.empty(),
                 sorption,

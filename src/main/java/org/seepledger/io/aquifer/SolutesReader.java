@@ -129,6 +129,7 @@ final class SolutesReader {
                 CheckedValues.of(values, place, Bounds.NOT_NEGATIVE, factor),
                 CheckedValues.of(marks, place, Bounds.POSITIVE, factor),
                 censored ? limit : Optional.empty(),
+                !censored,
                 unit);
     }
 
