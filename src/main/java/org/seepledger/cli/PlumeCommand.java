@@ -28,7 +28,7 @@ import picocli.CommandLine.Parameters;
             "    --every year --rate-unit kg/yr --above \"50 mg/L\"",
             "",
             "Written to DIR: plume.csv (the budget), mass.csv (what is there at each instant), trend.csv"
-                    + " (where it goes and how it changes), run.json (inputs, options, warnings).",
+                    + " (where it goes and how it changes), transect.csv (what crosses lines), run.json (inputs, options, warnings).",
             "Exit status: 0 done; 1 a fault of the program; 2 the command line is wrong; 3 the data are wrong;",
             "4 done, but a closure error exceeds --max-closure-error."
         })
@@ -76,6 +76,18 @@ final class PlumeCommand implements Callable<Integer> {
             description = "Count volume and area above a concentration, as \"50 mg/L\".")
     private String above;
 
+    @Option(
+            names = "--transects",
+            paramLabel = "F",
+            description = "Lines, as GeoJSON, each with a name: what crosses them goes into transect.csv.")
+    private Path transects;
+
+    @Option(
+            names = "--panels",
+            paramLabel = "F",
+            description = "Or measured panels of transects, as CSV: transect,solute,panel,q,c,area.")
+    private Path panels;
+
     @Mixin
     private ClosureLimit limit = new ClosureLimit();
 
@@ -110,6 +122,8 @@ final class PlumeCommand implements Callable<Integer> {
                 options.wells(),
                 dispersion,
                 above(),
+                Optional.ofNullable(transects),
+                Optional.ofNullable(panels),
                 options.clip(),
                 options.threads(),
                 overwrite);

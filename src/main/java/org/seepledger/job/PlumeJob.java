@@ -16,17 +16,23 @@ import org.seepledger.fault.DataFault;
 import org.seepledger.fault.UsageFault;
 import org.seepledger.io.Unreadable;
 import org.seepledger.io.aquifer.AquiferReader;
+import org.seepledger.io.prisms.TransectsReader;
 import org.seepledger.io.result.FileRecord;
 import org.seepledger.io.result.MassCsv;
 import org.seepledger.io.result.MassUnits;
 import org.seepledger.io.result.PlumeCsv;
 import org.seepledger.io.result.RunJson;
 import org.seepledger.io.result.Statement;
+import org.seepledger.io.result.TransectCsv;
 import org.seepledger.io.result.TrendCsv;
+import org.seepledger.io.table.MeasuredPanels;
 import org.seepledger.ledger.Period;
 import org.seepledger.ledger.PeriodBudget;
+import org.seepledger.plume.Crossing;
 import org.seepledger.plume.Plume;
 import org.seepledger.plume.SoluteBalance;
+import org.seepledger.plume.TransectFlows;
+import org.seepledger.prism.Transect;
 import org.seepledger.progress.Progress;
 import org.seepledger.report.PlumeSummary;
 import org.seepledger.unit.Measure;
@@ -41,6 +47,8 @@ public final class PlumeJob {
     private final MassUnits units;
     private final List<Period> periods;
     private final OptionalDouble above;
+    private List<MeasuredPanels> measured = List.of();
+    private List<Crossing> crossings = List.of();
 
     private PlumeJob(PlumeRequest request, Subject subject, Stopwatch stopwatch, Progress progress) {
         this.request = request;
@@ -93,6 +101,7 @@ public final class PlumeJob {
         stopwatch.lap("reading");
         Aquifer aquifer = subject.aquifer();
         List<Solute> solutes = solutes();
+        List<Transect> transects = transects();
         Balance water = WaterBalance.of(aquifer, subject.prisms(), request.wells(), request.threads(), progress);
         stopwatch.lap("balancing water");
         List<Plume> plumes = SoluteBalance.of(
@@ -101,6 +110,9 @@ public final class PlumeJob {
                 subject.prisms(),
                 new SoluteBalance.Options(request.wells(), request.dispersion(), above, request.threads()),
                 progress);
+        if (!transects.isEmpty()) {
+            crossings = TransectFlows.of(aquifer, solutes, transects, progress);
+        }
         stopwatch.lap("balancing solutes");
         Period whole = new Periods(aquifer.times()).record();
         List<PeriodBudget> records =
@@ -138,6 +150,23 @@ public final class PlumeJob {
         return solutes;
     }
 
+    /** Reads what is to be crossed; drawn transects are the result, measured ones are kept as they are. */
+    private List<Transect> transects() {
+        Aquifer aquifer = subject.aquifer();
+        measured = request.panels()
+                .map(file -> MeasuredPanels.read(
+                        subject.alsoReads(file),
+                        file.toString(),
+                        aquifer.lengthUnit(),
+                        aquifer.timeUnit(),
+                        subject.warnings()::add))
+                .orElse(List.of());
+        return request.transects()
+                .map(file -> new TransectsReader(subject.folder().crs(), aquifer.grid(), subject.notes()::add)
+                        .read(subject.alsoReads(file), file.toString()))
+                .orElse(List.of());
+    }
+
     private void write(OutputFolder out, List<Plume> plumes, Balance water) {
         Aquifer aquifer = subject.aquifer();
         Times times = aquifer.times();
@@ -147,6 +176,10 @@ public final class PlumeJob {
             PlumeCsv.write(out.file("plume.csv"), statement, plumes, periods, times, units);
             MassCsv.write(out.file("mass.csv"), statement, plumes, times, units, length, above);
             TrendCsv.write(out.file("trend.csv"), statement, plumes, times, aquifer.grid(), units, length);
+            if (!crossings.isEmpty() || !measured.isEmpty()) {
+                TransectCsv.write(
+                        out.file("transect.csv"), statement, crossings, measured, periods, times, units, length);
+            }
             writeRecord(out, statement, water);
         } catch (IOException e) {
             throw new UsageFault("The results cannot be written beside " + request.out() + " (" + Unreadable.reason(e)
@@ -177,6 +210,8 @@ public final class PlumeJob {
         options.put("wells", request.wells().name().toLowerCase(Locale.ROOT));
         options.put("dispersion", String.valueOf(request.dispersion()));
         request.above().ifPresent(threshold -> options.put("above", threshold.value() + " " + threshold.unit()));
+        request.transects().ifPresent(file -> options.put("transects", file.toString()));
+        request.panels().ifPresent(file -> options.put("panels", file.toString()));
         options.put("clip", String.valueOf(request.clip()));
         options.put("threads", String.valueOf(request.threads()));
         return options;

@@ -21,6 +21,8 @@ import org.seepledger.unit.Measure;
  * @param wells how wells in cut cells count
  * @param dispersion whether dispersion is booked
  * @param above the concentration above which volume and area are counted
+ * @param transects a GeoJSON file of lines to count what crosses
+ * @param panels a CSV of measured panels
  * @param clip whether prisms are cut at the grid's edge
  * @param threads how many threads may work
  * @param overwrite whether an earlier run's files may be replaced
@@ -38,6 +40,8 @@ public record PlumeRequest(
         WellRule wells,
         boolean dispersion,
         Optional<Threshold> above,
+        Optional<Path> transects,
+        Optional<Path> panels,
         boolean clip,
         int threads,
         boolean overwrite) {

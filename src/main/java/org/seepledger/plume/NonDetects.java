@@ -18,8 +18,12 @@ public enum NonDetects {
         this.share = share;
     }
 
-    /** The share of the limit. */
-    double share() {
-        return share;
+    /**
+     * {@return what stands for a value below a limit}
+     *
+     * @param limit the limit
+     */
+    public double of(double limit) {
+        return share * limit;
     }
 }

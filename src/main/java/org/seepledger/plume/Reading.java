@@ -27,7 +27,7 @@ record Reading(String solute, CellGeometry geometry, double[][] byChoice, boolea
             for (int cell = 0; cell < nonDetect.length; cell++) {
                 nonDetect[cell] = !Double.isNaN(found.limits()[cell]);
                 if (nonDetect[cell]) {
-                    byChoice[choice][cell] = choices[choice].share() * found.limits()[cell];
+                    byChoice[choice][cell] = choices[choice].of(found.limits()[cell]);
                 }
             }
         }

@@ -157,6 +157,64 @@ class PlumeCommandTest {
         assertThat(rows("trend.csv")).anyMatch(row -> row.get("quantity").equals("centre x"));
     }
 
+    private static final String LINE = "{'type': 'FeatureCollection', 'features': [{'type': 'Feature', 'properties':"
+            + " {'name': 'gate'}, 'geometry': {'type': 'LineString', 'coordinates': [[20, 30], [20, 0]]}}]}";
+
+    private Ran crossing(String line, String panels) throws IOException {
+        Path lines = Files.writeString(folder.resolve("lines.geojson"), line.replace('\'', '"'));
+        Path measured = Files.writeString(folder.resolve("panels.csv"), panels);
+        return files().plume("--transects", lines.toString(), "--panels", measured.toString(), "--rate-unit", "g/d");
+    }
+
+    /** Southward line, so that its right is west and eastward flow is negative: 0.1 m/d × 30 m × 4 m × 3.5 g/m³ in layer 1. */
+    @Test
+    void countsWhatCrosses() throws IOException {
+        Ran ran = crossing(
+                LINE,
+                "transect,solute,panel,q [m/d],c [ug/L],area [m2]\nweir,salt,a,0.5,200,4\nweir,salt,b,0.1,<10,6\n");
+        assertThat(ran.err()).isEmpty();
+        List<CSVRecord> rows = rows("transect.csv");
+        CSVRecord drawn = rows.stream()
+                .filter(row ->
+                        row.get("transect").equals("gate") && row.get("solute").equals("salt"))
+                .findFirst()
+                .orElseThrow();
+        assertThat(drawn.get("segment")).isEqualTo("segment 1");
+        assertThat(Double.parseDouble(drawn.get("net_rate"))).isCloseTo(-0.1 * 30 * 4 * 3.5, within(1e-9));
+        assertThat(Double.parseDouble(drawn.get("area"))).isCloseTo(120, within(1e-9));
+        CSVRecord measured = rows.get(rows.size() - 1);
+        assertThat(measured.get("segment")).isEqualTo("*");
+        assertThat(Double.parseDouble(measured.get("net_rate")))
+                .isCloseTo(0.5 * 0.2 * 4 + 0.1 * 0.005 * 6, within(1e-12));
+        assertThat(Double.parseDouble(measured.get("net_rate_nd_zero"))).isCloseTo(0.4, within(1e-12));
+        assertThat(measured.get("concentration_unit")).isEqualTo("ug/L");
+        assertThat(folder.resolve("out/run.json")).content().contains("lines.geojson", "panels.csv");
+    }
+
+    @ParameterizedTest
+    @CsvSource(
+            delimiter = '|',
+            value = {
+                "[20, 30], [20, -5] | t,1,1 | outside the grid",
+                "[20, 30], [20, 30] | t,1,1 | at least two that differ",
+                "[20, 30] | t,1,1 | at least two that differ",
+                "[20, 30], [20, 0] | t,-1,1 | 0 or more",
+                "[20, 30], [20, 0] | t,1,0 | more than 0",
+            })
+    void refusesWhatCannotBeCrossed(String line, String panel, String words) throws IOException {
+        String[] cells = panel.split(",");
+        Ran ran = crossing(
+                LINE.replace("[20, 30], [20, 0]", line),
+                "transect,q [m/d],c [mg/L],area [m2]\n" + cells[0] + ",1," + cells[1] + "," + cells[2] + "\n");
+        assertThat(ran.status()).isEqualTo(3);
+        assertThat(ran.err()).contains(words);
+    }
+
+    @Test
+    void wantsTheUnitOfMeasuredConcentrations() throws IOException {
+        assertThat(crossing(LINE, "transect,q,c,area\nt,1,1,1\n").err()).contains("no unit", "c [mg/L]");
+    }
+
     @Test
     void booksDispersionByChoice() throws IOException {
         done();
