@@ -27,7 +27,8 @@ class HouseTest {
 
     /** From the top down; packages of one floor do not know each other. */
     private static final List<List<String>> FLOORS = List.of(
-            List.of("cli", "desktop"),
+            List.of("cli"),
+            List.of("desktop"),
             List.of("job"),
             List.of("intake"),
             List.of("report"),
@@ -46,7 +47,12 @@ class HouseTest {
             List.of("unit", "fault", "progress"));
 
     private static final String[] ENGINE = {
-        ROOT + "balance..", ROOT + "plume..", ROOT + "prism..", ROOT + "aquifer..", ROOT + "ledger..",
+        ROOT + "balance..",
+        ROOT + "plume..",
+        ROOT + "sketch..",
+        ROOT + "prism..",
+        ROOT + "aquifer..",
+        ROOT + "ledger..",
     };
 
     @ArchTest
@@ -72,8 +78,8 @@ class HouseTest {
                                     events.add(SimpleConditionEvent.violated(type, dependency.getDescription())));
                 }
             })
-            .because("whoever reads a package need know only what lies below it; leaves know nobody, and the window and"
-                    + " the command line never lean on each other");
+            .because("whoever reads a package need know only what lies below it; leaves know nobody, and the command"
+                    + " line opens the window, never the other way round");
 
     @ArchTest
     static final ArchRule READERS_HAVE_NO_CYCLES = slices().matching(ROOT + "io.(*)..")
@@ -96,6 +102,15 @@ class HouseTest {
             .resideInAnyPackage(
                     "org.geotools..", "com.fasterxml..", "org.apache.commons.csv..", "com.networknt..", "org.ejml..")
             .because("a library that reads or writes files can then be changed in one place");
+
+    @ArchTest
+    static final ArchRule HTML_STAYS_IN_THE_PAGE = noClasses()
+            .that()
+            .resideOutsideOfPackage(ROOT + "report.page..")
+            .should()
+            .dependOnClassesThat()
+            .resideInAPackage("j2html..")
+            .because("what a report says must be there for the window too, and text is escaped in one place");
 
     @ArchTest
     static final ArchRule UNIT_LIBRARY_STAYS_IN_UNIT = noClasses()
@@ -122,6 +137,15 @@ class HouseTest {
             .should()
             .dependOnClassesThat(describe("files", HouseTest::isAboutFiles))
             .because("the engine asks suppliers for one interval and band at a time, wherever they have it from");
+
+    @ArchTest
+    static final ArchRule BUDGETS_KNOW_NO_DRAWINGS = noClasses()
+            .that()
+            .resideInAnyPackage(ROOT + "balance..", ROOT + "plume..")
+            .should()
+            .dependOnClassesThat()
+            .resideInAPackage(ROOT + "sketch..")
+            .because("a budget is struck for prisms, however they came to be");
 
     @ArchTest
     static final ArchRule ENGINE_KNOWS_NO_WINDOWS = noClasses()
@@ -155,14 +179,48 @@ class HouseTest {
             .because("what a run has to say is a result, and goes where the caller wants it");
 
     @ArchTest
-    static final ArchRule CLI_AND_DESKTOP_ARE_STRANGERS = noClasses()
+    static final ArchRule WINDOWS_STAY_IN_DESKTOP = noClasses()
             .that()
-            .resideInAPackage(ROOT + "desktop..")
+            .resideOutsideOfPackage(ROOT + "desktop..")
             .should()
             .dependOnClassesThat()
-            .resideInAPackage(ROOT + "cli..")
-            .allowEmptyShould(true)
-            .because("what both need belongs to a job");
+            .resideInAnyPackage("javafx..", "atlantafx..")
+            .because("everything but the window must run where there is no screen");
+
+    @ArchTest
+    static final ArchRule VIEW_MODELS_KNOW_NO_SCENE = noClasses()
+            .that()
+            .resideInAPackage(ROOT + "desktop..")
+            .and()
+            .haveSimpleNameEndingWith("Model")
+            .or()
+            .resideInAnyPackage(ROOT + "desktop.session..", ROOT + "desktop.port..", ROOT + "desktop.task..")
+            .should()
+            .dependOnClassesThat()
+            .resideInAnyPackage("javafx.scene..", "javafx.stage..", "javafx.animation..")
+            .because("a view model is tested without a toolkit, and a view can then be built anew");
+
+    @ArchTest
+    static final ArchRule DIALOGS_STAY_IN_PLATFORM = noClasses()
+            .that()
+            .resideOutsideOfPackage(ROOT + "desktop.platform..")
+            .should()
+            .dependOnClassesThat()
+            .haveNameMatching(
+                    "javafx\\.stage\\.(File|Directory)Chooser|javafx\\.scene\\.(input\\.Clipboard|control\\.Alert)")
+            .because("tests must be able to give every answer that a person can give");
+
+    @ArchTest
+    static final ArchRule THREADS_STAY_IN_TASK = noClasses()
+            .that()
+            .resideInAPackage(ROOT + "desktop..")
+            .and()
+            .resideOutsideOfPackage(ROOT + "desktop.task..")
+            .should()
+            .dependOnClassesThat()
+            .haveNameMatching(
+                    "java\\.lang\\.Thread|java\\.util\\.concurrent\\.Executor(Service|s)|javafx\\.concurrent\\..*")
+            .because("work that nobody can cancel or run at once in a test would come in by the back door");
 
     @ArchTest
     static final ArchRule NAMES_SAY_WHAT_A_THING_IS = noClasses()

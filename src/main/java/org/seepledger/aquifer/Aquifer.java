@@ -32,7 +32,8 @@ public record Aquifer(
         Storage storage,
         List<Source> sources,
         Measure lengthUnit,
-        Measure timeUnit) {
+        Measure timeUnit)
+        implements KnownCells {
 
     /** The storage item that specific yield gives. */
     public static final String WATER_TABLE_STORAGE = "water-table storage";
@@ -118,31 +119,31 @@ public record Aquifer(
                 .toList();
     }
 
-    /**
-     * {@return a window's cells with a ring of one cell around them}
-     *
-     * @param window the window
-     */
+    @Override
     public CellGeometry geometry(Window window) {
         return CellGeometry.of(grid, layers, window);
     }
 
-    /**
-     * {@return what is known of a block of cells in an interval}
-     *
-     * @param interval the interval, from 0
-     * @param geometry the cells, from {@link #geometry}
-     * @param wells the wells to count, all of them in the block
-     * @throws org.seepledger.fault.DataFault if the data are wrong
-     */
+    @Override
     public IntervalState state(int interval, CellGeometry geometry, List<PlacedWell> wells) {
-        Saturation saturation = Saturation.of(geometry, layers, head, interval);
+        Saturation saturation = saturation(interval, geometry);
         FaceFlows flows = flow.faceFlows(interval, geometry, saturation);
         List<CellTerm> terms = terms(interval, geometry, saturation, flows.active()).stream()
                 .map(GivenTerm::term)
                 .toList();
         List<WellRate> rates = wellRates(interval, geometry, flows.active(), wells, rate -> rate);
         return new IntervalState(geometry, saturation, flows, terms, rates);
+    }
+
+    /**
+     * {@return heads and saturated thickness of a block of cells in an interval}
+     *
+     * @param interval the interval, from 0
+     * @param geometry the cells, from {@link #geometry}
+     * @throws org.seepledger.fault.DataFault if the data are wrong
+     */
+    public Saturation saturation(int interval, CellGeometry geometry) {
+        return Saturation.of(geometry, layers, head, interval);
     }
 
     /**

@@ -59,6 +59,11 @@ public final class CellGeometry {
         return geometry;
     }
 
+    /** The same cells, when another part of them is wanted. */
+    CellGeometry within(Window window) {
+        return new CellGeometry(grid, window, block, top, bottom);
+    }
+
     private void check() {
         int size = block.window().size();
         for (int i = 0; i < top.length; i++) {

@@ -60,8 +60,13 @@ public record Well(String name, String category, double x, double y, Screen scre
         return parts;
     }
 
-    /** The mean rate over an interval, length³/time, positive where it adds water. */
-    double meanRate(double from, double to) {
+    /**
+     * {@return the mean rate over an interval, length³/time, positive where it adds water}
+     *
+     * @param from the interval's begin, in time units
+     * @param to its end
+     */
+    public double meanRate(double from, double to) {
         double volume = 0;
         boolean whole = true;
         for (PointRate line : schedule) {

@@ -49,6 +49,15 @@ public record Window(int row, int column, int rows, int columns) {
     }
 
     /**
+     * {@return whether another block lies in this one}
+     *
+     * @param other the other block
+     */
+    public boolean contains(Window other) {
+        return contains(other.row(), other.column()) && contains(other.rowEnd() - 1, other.columnEnd() - 1);
+    }
+
+    /**
      * {@return the place of a cell in a row-major array of this block}
      *
      * @param cellRow the cell's row in the grid

@@ -3,20 +3,20 @@ package org.seepledger.balance;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.IntStream;
-import org.seepledger.aquifer.Aquifer;
-import org.seepledger.aquifer.Block;
 import org.seepledger.aquifer.CellGeometry;
-import org.seepledger.aquifer.CellTerm;
 import org.seepledger.aquifer.IntervalState;
+import org.seepledger.aquifer.KnownCells;
 import org.seepledger.aquifer.PlacedWell;
-import org.seepledger.aquifer.WellRate;
+import org.seepledger.aquifer.Times;
 import org.seepledger.aquifer.Window;
 import org.seepledger.progress.Progress;
 
 /** One band of rows, worked through all intervals. */
 final class Band {
 
-    private final Aquifer aquifer;
+    private final Times times;
+    private final KnownCells known;
+    private final Span span;
     private final Window window;
     private final List<PrismAccounts> prisms;
     private final List<Contact> contacts;
@@ -24,14 +24,18 @@ final class Band {
     private final Imbalance imbalance;
 
     Band(
-            Aquifer aquifer,
+            Times times,
+            KnownCells known,
+            Span span,
             Window window,
             List<PrismAccounts> prisms,
             List<Contact> contacts,
             List<PlacedWell> wells,
             Imbalance imbalance) {
         this.contacts = contacts;
-        this.aquifer = aquifer;
+        this.times = times;
+        this.known = known;
+        this.span = span;
         this.window = window;
         this.prisms = prisms;
         this.wells = wells.stream()
@@ -41,17 +45,16 @@ final class Band {
     }
 
     BandResult work(Progress progress) {
-        CellGeometry geometry = aquifer.geometry(window);
-        int intervals = aquifer.times().intervals();
-        BandResult result = new BandResult(prisms, contacts, intervals);
+        CellGeometry geometry = known.geometry(window);
+        BandResult result = new BandResult(prisms, contacts, span);
         Window block = geometry.block().window();
         List<Optional<Elevations>> elevations =
                 prisms.stream().map(prism -> prism.elevations(block)).toList();
-        double record = aquifer.times().instant(intervals) - aquifer.times().instant(0);
-        for (int interval = 0; interval < intervals; interval++) {
-            IntervalState state = aquifer.state(interval, geometry, wells);
+        double duration = span.duration(times);
+        for (int interval = span.from(); interval < span.to(); interval++) {
+            IntervalState state = known.state(interval, geometry, wells);
             book(interval, state, elevations, result);
-            addImbalance(state, aquifer.times().length(interval) / record);
+            imbalance.add(state, window, times.length(interval) / duration);
             result.note(interval, state);
             progress.step();
         }
@@ -68,28 +71,6 @@ final class Band {
         for (int i = 0; i < contacts.size(); i++) {
             Contact contact = contacts.get(i);
             contact.book(state, slabs.get(contact.one()), slabs.get(contact.other()), result.exchanged(interval, i));
-        }
-    }
-
-    private void addImbalance(IntervalState state, double weight) {
-        Block block = state.flows().block();
-        double[] perCell = new double[block.size()];
-        for (CellTerm term : state.terms()) {
-            IntStream.range(0, perCell.length).forEach(cell -> perCell[cell] += term.rates()[cell]);
-        }
-        for (WellRate rate : state.wells()) {
-            perCell[block.cell(rate.layer(), rate.well().row(), rate.well().column())] += rate.rate();
-        }
-        for (int layer = 0; layer < block.layers(); layer++) {
-            for (int row = window.row(); row < window.rowEnd(); row++) {
-                for (int column = window.column(); column < window.columnEnd(); column++) {
-                    int cell = block.cell(layer, row, column);
-                    if (state.flows().active()[cell]) {
-                        double gain = state.flows().gain(layer, row, column) + perCell[cell];
-                        imbalance.add(layer, row, column, gain * weight);
-                    }
-                }
-            }
         }
     }
 }

@@ -68,6 +68,27 @@ public final class Bands {
      * @throws RuntimeException what the work on a band throws
      */
     public static <R> void work(List<? extends Callable<R>> bands, int threads, Consumer<R> inOrder) {
+        if (threads == 1) {
+            oneByOne(bands, inOrder);
+        } else {
+            atOnce(bands, threads, inOrder);
+        }
+    }
+
+    /** In the caller's own thread: to wait for another one costs time where answers are wanted many times a second. */
+    private static <R> void oneByOne(List<? extends Callable<R>> bands, Consumer<R> inOrder) {
+        for (Callable<R> band : bands) {
+            try {
+                inOrder.accept(band.call());
+            } catch (RuntimeException e) {
+                throw e;
+            } catch (Exception e) {
+                throw new IllegalStateException(e);
+            }
+        }
+    }
+
+    private static <R> void atOnce(List<? extends Callable<R>> bands, int threads, Consumer<R> inOrder) {
         ExecutorService workers = Executors.newFixedThreadPool(threads, Bands::daemon);
         try {
             Deque<Future<R>> waiting = new ArrayDeque<>();

@@ -2,7 +2,8 @@ package org.seepledger.balance;
 
 import java.util.ArrayList;
 import java.util.List;
-import org.seepledger.aquifer.Aquifer;
+import java.util.function.IntToDoubleFunction;
+import java.util.stream.IntStream;
 import org.seepledger.ledger.Account;
 import org.seepledger.ledger.ExchangeFlow;
 import org.seepledger.ledger.Group;
@@ -14,19 +15,22 @@ import org.seepledger.prism.Overlap;
  */
 final class ExchangeSheet {
 
-    private final Aquifer aquifer;
+    private final int intervals;
+    private final Span span;
     private final List<PrismAccounts> prisms;
     private final List<Contact> contacts;
     private final List<Overlap> overlaps;
     private final BandResult total;
 
     ExchangeSheet(
-            Aquifer aquifer,
+            int intervals,
+            Span span,
             List<PrismAccounts> prisms,
             List<Contact> contacts,
             List<Overlap> overlaps,
             BandResult total) {
-        this.aquifer = aquifer;
+        this.intervals = intervals;
+        this.span = span;
         this.prisms = prisms;
         this.contacts = contacts;
         this.overlaps = overlaps;
@@ -54,10 +58,8 @@ final class ExchangeSheet {
             boolean onward = contact.one() == giver && contact.other() == receiver;
             boolean back = contact.one() == receiver && contact.other() == giver;
             if (onward || back) {
-                double[] rates = new double[aquifer.times().intervals()];
-                for (int interval = 0; interval < rates.length; interval++) {
-                    rates[interval] = exchanged(interval, i, onward);
-                }
+                int contacting = i;
+                double[] rates = rates(interval -> exchanged(interval, contacting, onward));
                 flows.add(new ExchangeFlow(name(giver), name(receiver), rates));
             }
         }
@@ -80,8 +82,7 @@ final class ExchangeSheet {
 
     /** What a prism gives to the outside, or takes from it. */
     private double[] left(int prism, boolean gives) {
-        double[] rates = new double[aquifer.times().intervals()];
-        for (int interval = 0; interval < rates.length; interval++) {
+        return rates(interval -> {
             Tally own = total.tally(interval, prism);
             double all = throughFaces(prism, gives ? own.outflow() : own.inflow());
             double shared = 0;
@@ -91,9 +92,15 @@ final class ExchangeSheet {
                 }
             }
             boolean rounding = Math.abs(all - shared) <= 1e-12 * all;
-            rates[interval] = rounding ? 0 : all - shared;
-        }
-        return rates;
+            return rounding ? 0 : all - shared;
+        });
+    }
+
+    /** A rate for each interval; none for those that were not asked for. */
+    private double[] rates(IntToDoubleFunction rate) {
+        return IntStream.range(0, intervals)
+                .mapToDouble(interval -> span.holds(interval) ? rate.applyAsDouble(interval) : Double.NaN)
+                .toArray();
     }
 
     private double throughFaces(int prism, double[] byAccount) {

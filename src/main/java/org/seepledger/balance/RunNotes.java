@@ -74,7 +74,8 @@ public record RunNotes(
         uncounted = Collections.unmodifiableMap(new LinkedHashMap<>(uncounted));
     }
 
-    static RunNotes of(Aquifer aquifer, List<PrismAccounts> prisms, List<Overlap> overlaps, BandResult total) {
+    static RunNotes of(
+            Aquifer aquifer, Span span, List<PrismAccounts> prisms, List<Overlap> overlaps, BandResult total) {
         List<InactiveArea> inactive = new ArrayList<>();
         List<ClosedSide> closed = new ArrayList<>();
         List<CutWell> wells = new ArrayList<>();
@@ -83,7 +84,7 @@ public record RunNotes(
             PrismAccounts accounts = prisms.get(prism);
             String name = accounts.cut().prism().name();
             double[] areas = new double[accounts.chart().layers()];
-            for (int interval = 0; interval < aquifer.times().intervals(); interval++) {
+            for (int interval = span.from(); interval < span.to(); interval++) {
                 Tally tally = total.tally(interval, prism);
                 disagreement = Math.max(disagreement, tally.disagreement());
                 double[] now = tally.inactiveArea();

@@ -33,8 +33,12 @@ public record Whereabouts(String prism, double magnitude, List<HotSpot> largest)
                     double part = coverage.share(row, column) * imbalance.at(layer, row, column);
                     if (part != 0 && !Double.isNaN(part)) {
                         magnitude += Math.abs(part);
+                        boolean full = largest.size() == SHOWN;
+                        if (full && Math.abs(part) < Math.abs(largest.peek().imbalance())) {
+                            continue;
+                        }
                         largest.add(new HotSpot(layer, row, column, part));
-                        if (largest.size() > SHOWN) {
+                        if (full) {
                             largest.remove();
                         }
                     }

@@ -31,7 +31,8 @@ import picocli.CommandLine.IVersionProvider;
             BalanceCommand.class,
             TraceCommand.class,
             ExtractCommand.class,
-            PlumeCommand.class
+            PlumeCommand.class,
+            DesktopCommand.class
         },
         mixinStandardHelpOptions = true,
         versionProvider = Seepledger.ProgramVersion.class,

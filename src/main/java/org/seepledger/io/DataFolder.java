@@ -5,8 +5,6 @@ import java.nio.file.Files;
 import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.util.List;
-import java.util.Optional;
-import java.util.stream.Stream;
 import org.seepledger.fault.DataFault;
 
 /**
@@ -16,7 +14,6 @@ import org.seepledger.fault.DataFault;
  */
 public final class DataFolder {
 
-    private static final int NAMES_LOOKED_AT = 10_000;
     private static final String EXPECTED = "the path of a file below the folder, relative to it, with \"/\"";
 
     private final Path folder;
@@ -83,21 +80,10 @@ public final class DataFolder {
         if (!Files.isDirectory(parent)) {
             return fault(place, shown(relative) + ", whose folder does not exist", "Correct the path.");
         }
-        String remedy = nearest(path)
+        String remedy = NearestName.besides(path)
                 .map(name -> "Did you mean \"" + name + "\"?")
                 .orElse("Put the file there or correct the path.");
         return fault(place, shown(relative) + ", which does not exist", remedy);
-    }
-
-    private static Optional<String> nearest(Path missing) {
-        try (Stream<Path> files = Files.list(missing.getParent())) {
-            List<String> names = files.limit(NAMES_LOOKED_AT)
-                    .map(file -> file.getFileName().toString())
-                    .toList();
-            return NearestName.of(missing.getFileName().toString(), names);
-        } catch (IOException e) {
-            return Optional.empty();
-        }
     }
 
     private static String shown(String relative) {

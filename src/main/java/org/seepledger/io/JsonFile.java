@@ -37,7 +37,10 @@ public final class JsonFile {
     public static JsonNode read(Path file, String shownFile) {
         if (!Files.isRegularFile(file)) {
             String found = Files.exists(file) ? "something that is not a plain file" : "no such file";
-            throw new DataFault(shownFile, "", found, "a JSON file", "Correct the path.");
+            String remedy = NearestName.besides(file)
+                    .map(name -> "Did you mean \"" + name + "\"?")
+                    .orElse("Correct the path.");
+            throw new DataFault(shownFile, "", found, "a JSON file", remedy);
         }
         try (InputStream in = Files.newInputStream(file)) {
             checkSize(Files.size(file), shownFile);

@@ -1,14 +1,22 @@
 package org.seepledger.io;
 
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import java.util.Collection;
 import java.util.Comparator;
+import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.stream.Stream;
 
 /** Finds the name that was probably meant, to put it in a message. */
 public final class NearestName {
 
     private static final int LONGEST = 256;
+
+    /** A folder may hold millions of files; more than so many names are not looked at. */
+    private static final int NAMES_LOOKED_AT = 10_000;
 
     private NearestName() {}
 
@@ -25,6 +33,26 @@ public final class NearestName {
                 .filter(name -> distance(written, name) <= limit)
                 .min(Comparator.comparingInt((String name) -> distance(written, name))
                         .thenComparing(Comparator.naturalOrder()));
+    }
+
+    /**
+     * {@return the name beside a path that does not exist that it resembles most}
+     *
+     * @param missing the path
+     */
+    public static Optional<String> besides(Path missing) {
+        Path absolute = missing.toAbsolutePath().normalize();
+        if (absolute.getFileName() == null || !Files.isDirectory(absolute.getParent())) {
+            return Optional.empty();
+        }
+        try (Stream<Path> files = Files.list(absolute.getParent())) {
+            List<String> names = files.limit(NAMES_LOOKED_AT)
+                    .map(file -> file.getFileName().toString())
+                    .toList();
+            return of(absolute.getFileName().toString(), names);
+        } catch (IOException e) {
+            return Optional.empty();
+        }
     }
 
     /**

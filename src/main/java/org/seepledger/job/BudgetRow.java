@@ -2,9 +2,11 @@ package org.seepledger.job;
 
 import java.util.ArrayList;
 import java.util.Collection;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Function;
+import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.StorageKnowledge;
@@ -30,6 +32,8 @@ import org.seepledger.prism.Prism;
  * @param account the account, as its place among the prism's; -1 for a total
  */
 record BudgetRow(Prism prism, Period period, Item item, int account) {
+
+    private static final int MOST_LISTED = 30;
 
     private static final String FORM = "Name it as PRISM/PERIOD/ITEM/LAYER, with the words of budget.csv.";
 
@@ -73,8 +77,7 @@ record BudgetRow(Prism prism, Period period, Item item, int account) {
     static BudgetRow of(String name, Aquifer aquifer, List<Prism> prisms, List<Period> periods) {
         List<Rest<Prism>> ofPrism = after(name, prisms, Prism::name);
         if (ofPrism.isEmpty()) {
-            throw none(
-                    name, "prism", head(name), prisms.stream().map(Prism::name).toList());
+            throw none(name, "prism", name, prisms.stream().map(Prism::name).toList());
         }
         List<BudgetRow> found = new ArrayList<>();
         UsageFault fault = null;
@@ -82,7 +85,7 @@ record BudgetRow(Prism prism, Period period, Item item, int account) {
             List<Rest<Period>> ofPeriod = after(prism.text(), periods, Period::name);
             if (ofPeriod.isEmpty()) {
                 List<String> names = periods.stream().map(Period::name).toList();
-                fault = none(name, "period", head(prism.text()), names);
+                fault = none(name, "period", prism.text(), names);
             }
             List<Account> accounts = Trace.accounts(aquifer, prism.named());
             List<Item> items = items(accounts, aquifer.storageKnowledge() != StorageKnowledge.UNKNOWN);
@@ -92,7 +95,7 @@ record BudgetRow(Prism prism, Period period, Item item, int account) {
                         new BudgetRow(prism.named(), period.named(), items.get(i), i < accounts.size() ? i : -1)));
                 if (matching.isEmpty()) {
                     List<String> names = items.stream().map(Item::shortName).toList();
-                    fault = none(name, "item and layer", period.text(), names);
+                    fault = noItem(name, period.text(), names);
                 }
             }
         }
@@ -151,16 +154,39 @@ record BudgetRow(Prism prism, Period period, Item item, int account) {
         return rests;
     }
 
-    private static String head(String text) {
-        int slash = text.indexOf('/');
-        return slash < 0 ? text : text.substring(0, slash);
+    /** As many words between slashes as a name has, from the beginning of a text. */
+    private static String head(String text, String name) {
+        String[] words = text.split("/", -1);
+        long count = 1 + name.chars().filter(letter -> letter == '/').count();
+        return Stream.of(words).limit(count).collect(Collectors.joining("/"));
     }
 
-    private static UsageFault none(String name, String what, String written, List<String> known) {
-        String near = NearestName.of(written, known)
-                .map(nearest -> " The nearest is \"" + nearest + "\".")
-                .orElse(known.size() > 20 ? "" : " There are \"" + String.join("\", \"", known) + "\".");
+    /** There is no prism or period that a text begins with. */
+    private static UsageFault none(String name, String what, String text, List<String> known) {
+        String head = head(text, "");
+        if (known.contains(text)) {
+            return new UsageFault("--row \"" + name + "\": nothing follows the " + what + " \"" + text + "\". " + FORM);
+        }
+        Optional<String> near = known.stream()
+                .filter(one -> NearestName.of(head(text, one), List.of(one)).isPresent())
+                .min(Comparator.comparingInt(one -> NearestName.distance(head(text, one), one)));
+        return fault(name, what, near.map(one -> head(text, one)).orElse(head), near, known);
+    }
+
+    private static UsageFault noItem(String name, String text, List<String> known) {
+        Optional<String> near = NearestName.of(text, known);
+        List<String> items = known.stream()
+                .map(item -> item.substring(0, item.lastIndexOf('/')))
+                .distinct()
+                .toList();
+        return fault(name, "item and layer", text, near, items);
+    }
+
+    private static UsageFault fault(
+            String name, String what, String written, Optional<String> near, List<String> known) {
+        String remedy = near.map(nearest -> " The nearest is \"" + nearest + "\".")
+                .orElse(known.size() > MOST_LISTED ? "" : " There are \"" + String.join("\", \"", known) + "\".");
         return new UsageFault(
-                "--row \"" + name + "\": there is no " + what + " \"" + written + "\"." + near + " " + FORM);
+                "--row \"" + name + "\": there is no " + what + " \"" + written + "\"." + remedy + " " + FORM);
     }
 }

@@ -6,6 +6,7 @@ import java.io.UncheckedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
+import java.util.UUID;
 import org.seepledger.fault.UsageFault;
 import org.seepledger.io.Unreadable;
 
@@ -35,8 +36,8 @@ final class OutputFile implements AutoCloseable {
         }
         try {
             Files.createDirectories(absolute.getParent());
-            String name = "." + absolute.getFileName() + "-building-";
-            return new OutputFile(absolute, Files.createTempFile(absolute.getParent(), name, ""));
+            String name = "." + absolute.getFileName() + "-building-" + UUID.randomUUID();
+            return new OutputFile(absolute, Files.createFile(absolute.resolveSibling(name)));
         } catch (IOException e) {
             throw new UsageFault("The output file " + target + " cannot be written (" + Unreadable.reason(e)
                     + "). Name a file where you may write.");

@@ -43,7 +43,8 @@ final class Subject implements AutoCloseable {
         warnings.addAll(folder.warnings());
         notes.addAll(folder.notes());
         int layers = aquifer.layers().size();
-        PrismsReader reader = new PrismsReader(folder.crs(), aquifer.grid(), layers, clip, surfaces, notes::add);
+        PrismsReader reader =
+                new PrismsReader(folder.crs(), aquifer.grid(), layers, clip, surfaces, warnings::add, notes::add);
         try {
             this.prisms = reader.read(prismsFile, prismsFile.toString());
         } catch (RuntimeException e) {
@@ -114,8 +115,12 @@ final class Subject implements AutoCloseable {
 
     /** The units of results. */
     ResultUnits units(Optional<Measure> rate, Optional<Measure> volume) {
+        return units(aquifer(), rate, volume);
+    }
+
+    static ResultUnits units(Aquifer aquifer, Optional<Measure> rate, Optional<Measure> volume) {
         try {
-            return ResultUnits.of(aquifer().lengthUnit(), aquifer().timeUnit(), rate.orElse(null), volume.orElse(null));
+            return ResultUnits.of(aquifer.lengthUnit(), aquifer.timeUnit(), rate.orElse(null), volume.orElse(null));
         } catch (IllegalArgumentException e) {
             throw new UsageFault(
                     "The unit asked for does not fit: " + e.getMessage() + ". Give a rate as m3/d and a volume as m3.");

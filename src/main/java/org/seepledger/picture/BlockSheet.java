@@ -1,7 +1,9 @@
 package org.seepledger.picture;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import org.seepledger.picture.Mark.Anchor;
 import org.seepledger.picture.Mark.Fill;
@@ -20,6 +22,9 @@ final class BlockSheet {
     private static final double FIGURE = 11.5;
     private static final double LIST_LINE = 17;
     private static final double VISIBLE = 0.8;
+
+    /** A piece as it is drawn: the middle of its right edge. */
+    private record Drawn(Block piece, double x, double y) {}
 
     private final double width;
     private final boolean beside;
@@ -60,18 +65,15 @@ final class BlockSheet {
     private void head(int index, String title, String figure) {
         double x = left(index);
         marks.add(Mark.Text.of(x, 16, title, 14, Anchor.START).strong());
-        marks.add(Mark.Text.of(x, 34, Lettering.fitted(figure, 13, column - 4), 13, Anchor.START));
+        marks.add(Mark.Text.of(x, 34, figure, 13, Anchor.START));
     }
 
     void column(int index, String title, String figure, List<Block> pieces) {
         head(index, title, figure);
         double x = left(index);
-        List<Double> middles = new ArrayList<>();
-        for (Block piece : pieces) {
-            middles.add(draw(piece, x, block));
-        }
+        List<Drawn> drawn = pieces.stream().map(piece -> draw(piece, x, block)).toList();
         outline(x, block, y(0), pieces.isEmpty() ? y(0) : y(pieces.get(0).from()));
-        label(index, title, pieces, middles, block);
+        label(index, title, drawn);
     }
 
     /** Draws what lies between the height of the losses and that of the gains. */
@@ -80,28 +82,28 @@ final class BlockSheet {
         double storageWidth = open ? block : 0.62 * block;
         guide(left(0) + block, x + block, gains);
         guide(left(1) + block, x + storageWidth, losses);
-        List<Double> middles = new ArrayList<>();
+        List<Drawn> drawn = new ArrayList<>();
         if (open) {
             head(2, "Storage", "–");
-            middles.add(openBlock(pieces.get(0), x));
+            drawn.add(openBlock(pieces.get(0), x));
         } else {
-            head(
-                    2,
-                    "Storage",
-                    pieces.get(0).name().replace("storage ", "") + " "
-                            + pieces.get(0).figure());
-            middles.add(draw(pieces.get(0), x, storageWidth));
-            outline(x, storageWidth, y(pieces.get(0).from()), y(pieces.get(0).to()));
-            double beyond = x + storageWidth + 3;
-            middles.add(draw(pieces.get(1), beyond, block - storageWidth - 3));
-            outline(
-                    beyond,
-                    block - storageWidth - 3,
-                    y(pieces.get(1).from()),
-                    y(pieces.get(1).to()));
+            head(2, capital(pieces.get(0).name()), pieces.get(0).figure());
+            drawn.add(framed(pieces.get(0), x, storageWidth));
+            drawn.add(framed(pieces.get(1), x + storageWidth + 3, block - storageWidth - 3));
         }
-        label(2, "Storage and residual", pieces, middles, storageWidth);
+        drawn.sort(Comparator.comparingDouble(Drawn::y));
+        label(2, "Storage and residual", drawn);
         marks.add(line(MARGIN, y(0), width - MARGIN, y(0), Stroke.of(Ink.Token.TEXT, 1)));
+    }
+
+    private static String capital(String words) {
+        return words.substring(0, 1).toUpperCase(Locale.ROOT) + words.substring(1);
+    }
+
+    private Drawn framed(Block piece, double x, double wide) {
+        Drawn drawn = draw(piece, x, wide);
+        outline(x, wide, y(piece.from()), y(piece.to()));
+        return drawn;
     }
 
     private void guide(double from, double to, double level) {
@@ -113,20 +115,19 @@ final class BlockSheet {
         return new Mark.Line(new double[] {fromX, fromY, toX, toY}, stroke);
     }
 
-    /** {@return the y of the piece's middle} */
-    private double draw(Block piece, double x, double wide) {
+    private Drawn draw(Block piece, double x, double wide) {
         double upper = Math.min(y(piece.from()), y(piece.to()));
         double high = Math.abs(y(piece.from()) - y(piece.to()));
         if (high < VISIBLE) {
             double middle = upper + high / 2;
             marks.add(line(x, middle, x + wide, middle, Stroke.of(piece.ink(), 2)));
-            return middle;
+            return new Drawn(piece, x + wide, middle);
         }
         marks.add(Mark.Area.of(new Box(x, upper, wide, high), new Fill(piece.ink(), 1, piece.texture())));
         if (high > 4) {
             marks.add(line(x, upper, x + wide, upper, Stroke.of(Ink.Token.PAPER, 1.4)));
         }
-        return upper + high / 2;
+        return new Drawn(piece, x + wide, upper + high / 2);
     }
 
     private void outline(double x, double wide, double one, double other) {
@@ -136,41 +137,54 @@ final class BlockSheet {
         }
     }
 
-    private double openBlock(Block gap, double x) {
+    private Drawn openBlock(Block gap, double x) {
         double upper = Math.min(y(gap.from()), y(gap.to()));
         double high = Math.max(2, Math.abs(y(gap.from()) - y(gap.to())));
         marks.add(new Mark.Area(
                 List.of(new Box(x, upper, block, high).ring()),
                 Optional.empty(),
                 Optional.of(Stroke.of(gap.ink(), 1.6).dashed(5.0, 4.0))));
-        return upper + high / 2;
+        return new Drawn(gap, x + block, upper + high / 2);
     }
 
-    private void label(int index, String title, List<Block> pieces, List<Double> middles, double firstWidth) {
+    private void label(int index, String title, List<Drawn> drawn) {
         double half = beside ? 14 : 7;
-        double[] wanted = middles.stream().mapToDouble(middle -> middle).toArray();
+        double[] wanted = drawn.stream().mapToDouble(Drawn::y).toArray();
         double x = left(index) + block;
         double[] places = Spread.out(wanted, 2 * half, top + half - 4, base - half);
-        if (!beside && !pieces.isEmpty()) {
+        if (!beside && !drawn.isEmpty()) {
             listTitle(title);
         }
         for (int i = 0; i < places.length; i++) {
-            double from = left(index) + (i == 0 ? firstWidth : block) + 1;
-            double[] leader = {from, wanted[i], x + 5, wanted[i], x + 11, places[i], x + 14, places[i]};
+            Drawn one = drawn.get(i);
+            double from = one.x() < x - 1 ? dot(one) : one.x() + 1;
+            double[] leader = {from, one.y(), x + 5, one.y(), x + 11, places[i], x + 14, places[i]};
             marks.add(new Mark.Line(leader, Stroke.of(Ink.Token.MUTED, 0.8)));
             if (beside) {
-                writeBeside(pieces.get(i), x + 17, places[i], left(index) + column - 4);
+                writeBeside(one.piece(), x + 17, places[i], left(index) + column - 4);
             } else {
-                writeKey(pieces.get(i), x + 16, places[i]);
+                writeKey(one.piece(), x + 16, places[i]);
             }
         }
+    }
+
+    /** Marks where a leader begins that passes over another piece. */
+    private double dot(Drawn one) {
+        if (Math.abs(y(one.piece().from()) - y(one.piece().to())) < 8) {
+            return one.x() + 1;
+        }
+        double x = one.x() - 6;
+        Box dot = new Box(x - 2, one.y() - 2, 4, 4);
+        marks.add(Mark.Area.of(dot, Fill.of(Ink.Token.TEXT)));
+        return x;
     }
 
     private void writeBeside(Block piece, double x, double middle, double right) {
         String name = Lettering.fitted(piece.name(), NAME, right - x);
         marks.add(Mark.Text.of(x, middle - 2, name, NAME, Anchor.START).haloed());
-        String numbers = piece.figure() + (piece.share().isEmpty() ? "" : " · " + piece.share());
-        marks.add(Mark.Text.of(x, middle + 11, Lettering.fitted(numbers, FIGURE, right - x), FIGURE, Anchor.START)
+        String both = piece.figure() + " · " + piece.share();
+        boolean room = !piece.share().isEmpty() && Lettering.width(both, FIGURE) <= right - x;
+        marks.add(Mark.Text.of(x, middle + 11, room ? both : piece.figure(), FIGURE, Anchor.START)
                 .haloed()
                 .in(Ink.Token.MUTED));
     }

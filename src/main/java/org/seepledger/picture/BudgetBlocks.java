@@ -28,6 +28,7 @@ public final class BudgetBlocks {
 
     private final String prism;
     private final PeriodBudget budget;
+    private final Flows flows;
     private final UnitShown unit;
     private final Slices slices;
     private final double gains;
@@ -38,6 +39,7 @@ public final class BudgetBlocks {
     private BudgetBlocks(String prism, PeriodBudget budget, Flows flows, UnitShown unit) {
         this.prism = prism;
         this.budget = budget;
+        this.flows = flows;
         this.unit = unit;
         this.slices = Slices.of(budget, flows, unit);
         this.gains = Slices.sum(slices.gains());
@@ -53,7 +55,7 @@ public final class BudgetBlocks {
      * @param budget its budget in a period
      * @param flows which flows of an item are shown
      * @param unit the unit to show
-     * @param width in logical pixels, at least 300
+     * @param width in logical pixels, at least 340
      */
     public static Picture of(String prism, PeriodBudget budget, Flows flows, UnitShown unit, double width) {
         return new BudgetBlocks(prism, budget, flows, unit).picture(width);
@@ -68,7 +70,7 @@ public final class BudgetBlocks {
         sheet.words(equation());
         if (!slices.unknown().isEmpty()) {
             sheet.words("Not counted, since no number can be given: "
-                    + slices.unknown().stream().map(name -> name + " –").collect(Collectors.joining(", ")) + ".");
+                    + slices.unknown().stream().map(name -> name + "\u00a0–").collect(Collectors.joining(", ")) + ".");
         }
         return new Picture(
                 width,
@@ -83,9 +85,13 @@ public final class BudgetBlocks {
         return Block.stack(few, ink, ink == Ink.Token.GAIN ? Mark.Texture.RISING : Mark.Texture.FALLING);
     }
 
-    /** {@return storage and the residual; where storage is not known, the gap alone} */
+    /** {@return storage and the residual, as shares of throughput; where storage is not known, the gap alone} */
     private List<Block> third() {
-        double most = Math.max(gains + Math.max(0, -known(storage)), losses + Math.max(0, known(storage)));
+        double most = unit.of(
+                flows == Flows.GROSS
+                        ? budget.totals().throughput()
+                        : budget.totals().netThroughput(),
+                budget.period());
         if (Double.isNaN(storage)) {
             double gap = gains - losses;
             return List.of(
@@ -114,7 +120,9 @@ public final class BudgetBlocks {
                     + ". Storage is not known: the open block is change in storage and residual together.";
         }
         return sides + " + change in storage " + Figures.typeset(storage) + " + residual " + Figures.typeset(residual)
-                + ", in " + unit.words() + "; heights are to scale. Within the period storage gave "
+                + ", in " + unit.words() + "; heights are to scale."
+                + (flows == Flows.NET ? " Of each item the net flow is shown." : "")
+                + " Within the period storage gave "
                 + Figures.typeset(stored(Entry::inflow)) + " and took " + Figures.typeset(stored(Entry::outflow)) + ".";
     }
 

@@ -2,6 +2,7 @@ package org.seepledger.picture;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.OptionalDouble;
 import java.util.OptionalInt;
 import java.util.stream.DoubleStream;
 import java.util.stream.IntStream;
@@ -25,6 +26,7 @@ public final class BudgetSeries {
     private static final Fill RESIDUAL = new Fill(Ink.Token.RESIDUAL, 1, Texture.CROSSED);
     private static final double RIGHT = 10;
     private static final double STRIP = 46;
+    private static final double LOWEST = 56;
 
     private final List<PeriodBudget> budgets;
     private final SeriesValues values;
@@ -41,13 +43,19 @@ public final class BudgetSeries {
     private final Picture picture;
 
     private BudgetSeries(
-            String prism, List<PeriodBudget> budgets, Times times, UnitShown unit, OptionalInt marked, double width) {
+            String prism,
+            List<PeriodBudget> budgets,
+            Times times,
+            UnitShown unit,
+            OptionalInt marked,
+            double width,
+            OptionalDouble height) {
         this.budgets = List.copyOf(budgets);
         this.values = SeriesValues.of(budgets, unit);
         this.unit = unit;
         this.width = width;
         this.top = 26;
-        this.bottom = top + (width >= 600 ? 230 : 190);
+        this.bottom = top + plotHeight(height);
         this.stripTop = bottom + 50;
         this.end = values.closes() ? stripTop - 4 : stripTop + STRIP;
         double greatest = IntStream.range(0, values.count())
@@ -77,6 +85,12 @@ public final class BudgetSeries {
                 marks(marked));
     }
 
+    /** How high gains and losses are drawn, as far as what else there is leaves room. */
+    private double plotHeight(OptionalDouble height) {
+        double rest = top + (values.closes() ? 72 : 76 + STRIP);
+        return height.isPresent() ? Math.max(LOWEST, height.getAsDouble() - rest) : width >= 600 ? 230 : 190;
+    }
+
     /**
      * {@return the chart of a series of budgets}
      *
@@ -85,11 +99,33 @@ public final class BudgetSeries {
      * @param times the record's instants, for dates
      * @param unit the unit to show
      * @param marked the period to mark, if any
-     * @param width in logical pixels, at least 300
+     * @param width in logical pixels, at least 340
      */
     public static BudgetSeries of(
             String prism, List<PeriodBudget> budgets, Times times, UnitShown unit, OptionalInt marked, double width) {
-        return new BudgetSeries(prism, budgets, times, unit, marked, width);
+        return new BudgetSeries(prism, budgets, times, unit, marked, width, OptionalDouble.empty());
+    }
+
+    /**
+     * {@return the chart of a series of budgets in a given room}
+     *
+     * @param prism the prism's name
+     * @param budgets its budgets, at least one
+     * @param times the record's instants, for dates
+     * @param unit the unit to show
+     * @param marked the period to mark, if any
+     * @param width in logical pixels, at least 300
+     * @param height in logical pixels; the chart is higher where it could not be read otherwise
+     */
+    public static BudgetSeries of(
+            String prism,
+            List<PeriodBudget> budgets,
+            Times times,
+            UnitShown unit,
+            OptionalInt marked,
+            double width,
+            double height) {
+        return new BudgetSeries(prism, budgets, times, unit, marked, width, OptionalDouble.of(height));
     }
 
     /** {@return what it looks like} */
@@ -141,9 +177,9 @@ public final class BudgetSeries {
     }
 
     private String aboutResidual() {
-        String name = values.storageKnown() ? "residual" : "not explained, storage included";
+        String name = values.storageKnown() ? "residual" : "gains − losses";
         return values.closes()
-                ? name + ": rounding alone, at most " + Figures.typeset(values.largestResidual()) + " " + unit.words()
+                ? name + ": rounding alone, at most " + Figures.typeset(values.largestResidual())
                 : name + ", on a scale of its own";
     }
 
@@ -203,7 +239,7 @@ public final class BudgetSeries {
                         + budgets.get(budgets.size() - 1).period().name() + ", in " + unit.words();
         return span + ": gains " + range(values.gains()) + ", losses " + range(values.losses()) + ", change in storage "
                 + range(values.storage()) + ", "
-                + (values.storageKnown() ? "residual " : "not explained, storage included, ")
+                + (values.storageKnown() ? "residual " : "gains − losses ")
                 + range(values.residual()) + ".";
     }
 

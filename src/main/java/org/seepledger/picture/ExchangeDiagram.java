@@ -66,7 +66,7 @@ public final class ExchangeDiagram {
      * @param flows what they give to each other and to the outside
      * @param period the period
      * @param unit the unit to show
-     * @param width in logical pixels, at least 320
+     * @param width in logical pixels, at least 340
      */
     public static Picture of(
             List<String> prisms, List<ExchangeFlow> flows, Period period, UnitShown unit, double width) {
@@ -79,7 +79,7 @@ public final class ExchangeDiagram {
                 .filter(Double::isFinite)
                 .max()
                 .orElse(1);
-        ExchangeSheet sheet = new ExchangeSheet(width, WIDEST / largest, unit.words());
+        ExchangeSheet sheet = new ExchangeSheet(width, WIDEST / largest, unit.words(), flows);
         double y = sheet.top();
         for (int row = 0; row < prisms.size(); row++) {
             y = sheet.node(prisms.get(row), row, flows, y) + ROW_GAP;

@@ -21,7 +21,10 @@ final class ExchangeSheet {
     private static final double PAD = 5;
     private static final double TOP = 24;
     private static final double HEAD = 8;
-    private static final double HAIRLINE = 1;
+    /** Bold letters are wider than others. */
+    private static final double BOLD = 0.9;
+
+    private static final double HAIRLINE = 1.2;
     private static final int CORNER = 16;
     private static final Stroke UNKNOWN = Stroke.of(Ink.Token.TEXT, 1.4).dashed(4.0, 3.0);
 
@@ -41,13 +44,18 @@ final class ExchangeSheet {
      * @param width in logical pixels
      * @param scale logical pixels for one of the unit shown
      * @param unit the unit as it is written
+     * @param flows all flows
      */
-    ExchangeSheet(double width, double scale, String unit) {
+    ExchangeSheet(double width, double scale, String unit, List<Flow> flows) {
         this.width = width;
         this.scale = scale;
-        this.nodeLeft = 0.26 * width;
+        double widest = flows.stream()
+                .mapToDouble(flow -> Lettering.width(flow.figure(), FIGURE))
+                .max()
+                .orElse(0);
+        this.nodeLeft = Math.max(0.26 * width, widest + Lettering.width("out ", FIGURE) + 6);
         this.nodeRight = nodeLeft + Math.min(180, 0.28 * width);
-        this.corridor = Math.max(58, 0.09 * width);
+        this.corridor = Math.max(0.09 * width, widest + 14);
         marks.add(head(4, "outside, " + unit, Anchor.START));
         marks.add(head(width - 4, "between prisms", Anchor.END));
     }
@@ -72,16 +80,18 @@ final class ExchangeSheet {
      */
     double node(String name, int row, List<Flow> flows, double y) {
         double left = y + PAD;
-        for (Flow flow : flows) {
-            if (flow.outside() && (flow.giver() == row || flow.receiver() == row)) {
-                left = outside(flow, left) + PAD;
+        for (boolean gain : new boolean[] {true, false}) {
+            for (Flow flow : flows) {
+                if (flow.outside() && (gain ? flow.receiver() : flow.giver()) == row) {
+                    left = outside(flow, left) + PAD;
+                }
             }
         }
         double right = y + PAD;
         for (Flow flow : inOrder(flows, row)) {
             right = attach(flow, row, right) + PAD;
         }
-        Paragraph words = new Paragraph(name, NAME, nodeRight - nodeLeft - 14);
+        Paragraph words = new Paragraph(name, NAME, BOLD * (nodeRight - nodeLeft - 14));
         double end = Math.max(Math.max(left, right), y + words.height() + 2 * PAD);
         Box box = new Box(nodeLeft, y, nodeRight - nodeLeft, end - y);
         marks.add(new Mark.Area(
@@ -94,15 +104,19 @@ final class ExchangeSheet {
         return end;
     }
 
-    /** Flows on the right of a prism: those upward first, the nearest uppermost; then those downward, the nearest lowest. */
+    /**
+     * Flows on the right of a prism: those upward first, the nearest uppermost; then those downward, the nearest lowest; of
+     * two with the same partner the one given first, so that they do not cross.
+     */
     private static List<Flow> inOrder(List<Flow> flows, int row) {
         Comparator<Flow> order = Comparator.comparingInt(flow -> {
             int steps = (flow.giver() == row ? flow.receiver() : flow.giver()) - row;
             return steps < 0 ? -1000 - steps : 1000 - steps;
         });
+        Comparator<Flow> givenFirst = Comparator.comparing(flow -> flow.giver() != row);
         return flows.stream()
                 .filter(flow -> !flow.outside() && (flow.giver() == row || flow.receiver() == row))
-                .sorted(order)
+                .sorted(order.thenComparing(givenFirst))
                 .toList();
     }
 
@@ -113,7 +127,7 @@ final class ExchangeSheet {
         double far = nodeLeft - 6 - Math.min(90, 0.55 * nodeLeft);
         double near = nodeLeft - 2;
         String words = (gain ? "in " : "out ") + flow.figure();
-        marks.add(Mark.Text.of(near, y + FIGURE, Lettering.fitted(words, FIGURE, near - 2), FIGURE, Anchor.END));
+        marks.add(Mark.Text.of(near, y + FIGURE, words, FIGURE, Anchor.END));
         if (flow.known()) {
             double from = gain ? far : near;
             arrow(from, gain ? near : far, middle, thickness(flow), gain ? Ink.Token.GAIN : Ink.Token.LOSS);
@@ -141,8 +155,7 @@ final class ExchangeSheet {
         double begin = gives ? y + WORDS : y;
         (gives ? leaves : enters).put(flow, begin + thick / 2);
         if (gives) {
-            String words = Lettering.fitted(flow.figure(), FIGURE, corridor - 6);
-            marks.add(Mark.Text.of(nodeRight + 5, y + FIGURE, words, FIGURE, Anchor.START)
+            marks.add(Mark.Text.of(nodeRight + 5, y + FIGURE, flow.figure(), FIGURE, Anchor.START)
                     .haloed());
         }
         return begin + thick;
@@ -156,7 +169,8 @@ final class ExchangeSheet {
         double half = thickness(flow) / 2;
         double x = nodeRight + corridor;
         double room = width - 8 - half - x;
-        double reach = Math.min(room * (1 - Math.pow(0.55, span)), 30 + 40 * span);
+        double middling = Math.min(room * (1 - Math.pow(0.55, span)), 30 + 40 * span);
+        double reach = Math.min(room, flow.giver() < flow.receiver() ? middling + half + 5 : middling - half);
         double[] middle = swing(x, from, to, reach);
         if (!flow.known()) {
             double[] whole = new double[middle.length + 4];
@@ -170,8 +184,8 @@ final class ExchangeSheet {
         }
         bands.add(new Mark.Area(
                 List.of(outline(middle, from, to, half)),
-                Optional.of(new Fill(Ink.Token.WATER, 0.55, Texture.PLAIN)),
-                Optional.of(Stroke.of(Ink.Token.PAPER, 0.8))));
+                Optional.of(new Fill(Ink.Token.WATER, half > 2 ? 0.55 : 0.85, Texture.PLAIN)),
+                half > 2 ? Optional.of(Stroke.of(Ink.Token.PAPER, 0.8)) : Optional.empty()));
     }
 
     /** {@return a way out to the right, along and back, its corners round} */

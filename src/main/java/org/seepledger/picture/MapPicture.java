@@ -5,7 +5,7 @@ import java.util.DoubleSummaryStatistics;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.ToDoubleFunction;
-import org.seepledger.aquifer.PlacedWell;
+import org.seepledger.aquifer.Aquifer;
 import org.seepledger.balance.HotSpot;
 import org.seepledger.ledger.PeriodBudget;
 import org.seepledger.picture.Mark.Fill;
@@ -26,7 +26,10 @@ public final class MapPicture {
 
     private static final double TOP = 6;
     private static final double RIGHT = 8;
+    private static final double GAP = 12;
+    private static final double LEGEND = 360;
 
+    private final Aquifer aquifer;
     private final MapSheet sheet;
     private final double width;
     private final double height;
@@ -42,7 +45,8 @@ public final class MapPicture {
      */
     public record Ground(Drape values, ValueScale scale, String title, String unit, boolean contoured) {}
 
-    private MapPicture(Prism subject, List<Prism> others, Optional<Ground> ground, double width) {
+    private MapPicture(Aquifer aquifer, Prism subject, List<Prism> others, Optional<Ground> ground, double width) {
+        this.aquifer = aquifer;
         MapFrame frame = frame(subject, width);
         this.width = width;
         this.height = frame.box().bottom() + MapSheet.MARGIN + STRIP;
@@ -82,7 +86,7 @@ public final class MapPicture {
     }
 
     private void lay(Ground under) {
-        sheet.drape(under.values(), under.scale(), under.contoured() ? VEILED : 1);
+        sheet.drape(under.values(), under.scale(), opacity(under));
         if (under.contoured()) {
             sheet.contours(
                     under.values(),
@@ -93,9 +97,9 @@ public final class MapPicture {
     /**
      * {@return a map with the net flow through each lateral face as an arrow}
      *
+     * @param aquifer the aquifer, whose wells are shown
      * @param subject the prism
      * @param others the other prisms
-     * @param wells wells to show
      * @param ground what lies under it
      * @param line the line of the section, if there is one
      * @param budget the prism's budget over the record
@@ -103,20 +107,21 @@ public final class MapPicture {
      * @param width in logical pixels
      */
     public static Picture ofFaces(
+            Aquifer aquifer,
             Prism subject,
             List<Prism> others,
-            List<PlacedWell> wells,
             Optional<Ground> ground,
             Optional<SectionLine> line,
             PeriodBudget budget,
             UnitShown unit,
             double width) {
-        MapPicture map = new MapPicture(subject, others, ground, width);
+        MapPicture map = new MapPicture(aquifer, subject, others, ground, width);
         line.ifPresent(map::drawLine);
         new FaceArrows(subject, budget, unit).draw(map.sheet);
-        wells.forEach(map.sheet::well);
+        aquifer.placedWells().forEach(map.sheet::well);
         others.forEach(map.sheet::name);
         return map.picture(
+                ground,
                 "Map of " + subject.name() + " with the flow through its faces",
                 "Arrows across the faces point inward where water comes in and outward where it leaves; their widths are in"
                         + " proportion to net flow in " + unit.words() + ".");
@@ -125,17 +130,20 @@ public final class MapPicture {
     /**
      * {@return a map of what cells gain that nothing accounts for}
      *
+     * @param aquifer the aquifer
      * @param subject the prism
      * @param ground the imbalances
      * @param spots the cells that are furthest from balance, numbered in their order
      * @param width in logical pixels
      */
-    public static Picture ofImbalance(Prism subject, Ground ground, List<HotSpot> spots, double width) {
-        MapPicture map = new MapPicture(subject, List.of(), Optional.of(ground), width);
+    public static Picture ofImbalance(
+            Aquifer aquifer, Prism subject, Ground ground, List<HotSpot> spots, double width) {
+        MapPicture map = new MapPicture(aquifer, subject, List.of(), Optional.of(ground), width);
         for (int i = 0; i < spots.size(); i++) {
             map.drawSpot(ground.values(), spots.get(i), String.valueOf(i + 1));
         }
         return map.picture(
+                Optional.of(ground),
                 "Map of the imbalance of cells in " + subject.name(),
                 "What each cell gains that nothing accounts for, mean over the record; numbered are the cells that are"
                         + " furthest from balance.");
@@ -165,7 +173,22 @@ public final class MapPicture {
         sheet.above(Mark.Text.of(x, y + 3.5, number, 10, Mark.Anchor.MIDDLE).strong());
     }
 
-    private Picture picture(String title, String description) {
-        return new Picture(width, height, title, description, sheet.marks());
+    private Picture picture(Optional<Ground> ground, String title, String description) {
+        List<Mark> marks = new ArrayList<>(sheet.marks());
+        Box box = sheet.frame().box();
+        double strip = box.bottom() + MapSheet.MARGIN + 2;
+        marks.addAll(NorthArrow.marks(box.x(), strip));
+        double scale = sheet.frame().scale() / aquifer.grid().planUnit();
+        ScaleBar bar = ScaleBar.within(scale, aquifer.lengthUnit().toString(), width / 4);
+        marks.addAll(bar.marks(box.x() + NorthArrow.WIDTH + GAP, strip + 8));
+        double left = box.x() + NorthArrow.WIDTH + bar.width() + 3 * GAP;
+        Box room = new Box(left, strip, Math.min(LEGEND, box.right() - left), RampLegend.LEVEL_HEIGHT);
+        ground.ifPresent(under -> marks.addAll(
+                RampLegend.level(under.scale(), opacity(under), under.title() + ", " + under.unit(), room)));
+        return new Picture(width, height, title, description, marks);
+    }
+
+    private static double opacity(Ground ground) {
+        return ground.contoured() ? VEILED : 1;
     }
 }

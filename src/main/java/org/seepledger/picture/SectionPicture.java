@@ -24,7 +24,7 @@ public final class SectionPicture {
     private static final double HEIGHT = 260;
     private static final double TOP = 22;
     private static final double LEFT = 48;
-    private static final double RIGHT = 96;
+    private static final double RIGHT = 116;
     private static final double KEY = 56;
     private static final double SMALL = SectionSheet.SMALL;
     private static final Stroke AT_START = Stroke.of(Ink.Token.WATER, 1.3).dashed(5.0, 3.0);

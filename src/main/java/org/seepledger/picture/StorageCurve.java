@@ -58,7 +58,7 @@ public final class StorageCurve {
      * @param budgets its budgets, at least one, whose periods follow one another
      * @param times the record's instants, for dates
      * @param unit the unit to show, of volumes
-     * @param width in logical pixels, at least 300
+     * @param width in logical pixels, at least 340
      * @throws IllegalArgumentException if the unit is one of rates
      */
     public static Picture of(String prism, List<PeriodBudget> budgets, Times times, UnitShown unit, double width) {
@@ -70,32 +70,34 @@ public final class StorageCurve {
 
     private Picture picture(String prism, Times times) {
         List<Mark> marks = new ArrayList<>();
-        DoubleStream all = DoubleStream.concat(values(storage), values(residual));
-        double[] range = all.toArray();
+        double[] range = DoubleStream.concat(values(storage), values(residual)).toArray();
         double least = DoubleStream.of(range).min().orElse(0);
         double greatest = DoubleStream.of(range).max().orElse(0);
         double high = width >= 600 ? 190 : 160;
-        double widest = new ValueAxis(least, greatest, 0, high).labelWidth(true);
-        double left = 12 + widest;
+        double left = 12 + new ValueAxis(least, greatest, 0, high).labelWidth(true);
         double right = width - RIGHT;
         double keyEnd = key(left, right, marks);
         ValueAxis axis = new ValueAxis(least, greatest, keyEnd + TOP, high);
         TimeAxis time = new TimeAxis(periods, times, left, right);
         axis.draw(left, right, true, marks);
-        if (storageKnown) {
-            double[] curve = curve(storage, time, axis);
-            marks.add(new Mark.Area(
-                    List.of(closed(curve, axis.y(0))),
-                    Optional.of(new Fill(Ink.Token.STORAGE, 1, Texture.DOTS)),
-                    Optional.empty()));
-            marks.add(new Mark.Line(curve, Stroke.of(Ink.Token.STORAGE, 2)));
+        if (storage.size() > 1) {
+            draw(time, axis, marks);
         }
         axis.zero(left, right, marks);
-        marks.add(new Mark.Line(curve(residual, time, axis), residualStroke()));
         double bottom = keyEnd + TOP + high;
         time.draw(bottom + 4, width, marks);
         return new Picture(
                 width, bottom + 28, "Water stored in " + prism + " since the record began", description(), marks);
+    }
+
+    private void draw(TimeAxis time, ValueAxis axis, List<Mark> marks) {
+        if (storageKnown) {
+            double[] curve = curve(storage, time, axis);
+            Fill fill = new Fill(Ink.Token.STORAGE, 1, Texture.DOTS);
+            marks.add(new Mark.Area(List.of(closed(curve, axis.y(0))), Optional.of(fill), Optional.empty()));
+            marks.add(new Mark.Line(curve, Stroke.of(Ink.Token.STORAGE, 2)));
+        }
+        marks.add(new Mark.Line(curve(residual, time, axis), residualStroke()));
     }
 
     private static Stroke residualStroke() {
@@ -108,7 +110,7 @@ public final class StorageCurve {
             key.filled(new Fill(Ink.Token.STORAGE, 1, Texture.DOTS), "taken by storage, " + last(storage));
             key.line(residualStroke(), "residual, " + last(residual));
         } else {
-            key.line(residualStroke(), "not explained, storage included, " + last(residual));
+            key.line(residualStroke(), "gains − losses, " + last(residual));
         }
         return key.end();
     }
@@ -135,9 +137,6 @@ public final class StorageCurve {
     }
 
     private static double[] closed(double[] curve, double zero) {
-        if (curve.length == 0) {
-            return curve;
-        }
         double[] ring = new double[curve.length + 4];
         System.arraycopy(curve, 0, ring, 2, curve.length);
         ring[0] = curve[0];
@@ -153,10 +152,9 @@ public final class StorageCurve {
                         + " periods, since no number can be given for the next."
                 : "";
         if (!storageKnown) {
-            return "Storage is not known; what is not explained, storage included, has come to " + last(residual) + "."
-                    + covered;
+            return "Storage is not known; gains − losses, " + last(residual) + "." + covered;
         }
-        return "Storage has taken " + last(storage) + "; between, from "
+        return "Storage has taken, " + last(storage) + "; in between, from "
                 + Figures.typeset(values(storage).min().orElse(0)) + " to "
                 + Figures.typeset(values(storage).max().orElse(0)) + ". The residual has come to "
                 + last(residual).replace("in the end ", "") + "." + covered;

@@ -16,6 +16,7 @@ import java.util.Locale;
 public record Ticks(BigDecimal first, BigDecimal step, int count) {
 
     private static final int LARGEST_PLAIN = 7;
+    private static final int SMALLEST_PLAIN = 5;
 
     /**
      * {@return the ticks within a range}
@@ -70,7 +71,7 @@ public record Ticks(BigDecimal first, BigDecimal step, int count) {
     public String label(int index) {
         BigDecimal value = value(index);
         int power = step.precision() - step.scale() - 1;
-        if (power > LARGEST_PLAIN || power < -LARGEST_PLAIN) {
+        if (power > LARGEST_PLAIN || power < -SMALLEST_PLAIN) {
             return value.signum() == 0
                     ? "0"
                     : String.format(Locale.ROOT, "%.1e", value).replace('-', '−');

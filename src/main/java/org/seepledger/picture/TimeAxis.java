@@ -85,7 +85,7 @@ final class TimeAxis {
     }
 
     private static void tick(double x, double y, String words, double pictureWidth, Labels labels, List<Mark> marks) {
-        double half = Lettering.width(words, SIZE) / 2;
+        double half = Lettering.width(words, SIZE) / 2 + 2;
         double place = Math.max(half, Math.min(pictureWidth - half, x));
         Mark.Text label = Mark.Text.of(place, y + TICK + SIZE + 1, words, SIZE, Mark.Anchor.MIDDLE);
         if (labels.place(List.of(label), marks)) {

@@ -58,6 +58,33 @@ public record ValueScale(Ramp ramp, double from, double to) {
      */
     public int argb(double value, double opacity) {
         int alpha = (int) Math.round(255 * opacity);
-        return Double.isFinite(value) ? alpha << 24 | ramp.rgb((value - from) / (to - from)) : 0;
+        return Double.isFinite(value) ? alpha << 24 | ramp.rgb(share(value)) : 0;
+    }
+
+    /**
+     * {@return where along the ramp a value lies, 0 at its beginning and 1 at its end}
+     *
+     * @param value the value
+     */
+    public double share(double value) {
+        return (value - from) / (to - from);
+    }
+
+    /**
+     * {@return the value at a place along the ramp}
+     *
+     * @param share 0 at its beginning and 1 at its end
+     */
+    public double at(double share) {
+        return from + share * (to - from);
+    }
+
+    /**
+     * {@return round values in the range}
+     *
+     * @param most how many there may be, at least 2
+     */
+    public Ticks ticks(int most) {
+        return Ticks.within(from, to, most);
     }
 }

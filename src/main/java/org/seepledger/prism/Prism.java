@@ -1,6 +1,5 @@
 package org.seepledger.prism;
 
-import java.util.ArrayList;
 import java.util.List;
 
 /**
@@ -24,16 +23,6 @@ public record Prism(String name, List<Ring> rings, VerticalRange range) {
      * {@return the rings part by part: an outer ring, then its islands}
      */
     public List<List<Ring>> parts() {
-        List<List<Ring>> parts = new ArrayList<>();
-        int begin = 0;
-        while (begin < rings.size()) {
-            int end = begin + 1;
-            while (end < rings.size() && rings.get(end).island() > 0) {
-                end++;
-            }
-            parts.add(rings.subList(begin, end));
-            begin = end;
-        }
-        return parts;
+        return Ring.byPart(rings);
     }
 }

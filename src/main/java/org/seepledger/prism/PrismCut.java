@@ -28,8 +28,9 @@ public final class PrismCut {
     private final int[] itemOfSide;
     private final Pieces pieces;
     private final Coverage coverage;
+    private final double area;
 
-    private PrismCut(Prism prism, Grid grid, List<Side> sides, Pieces pieces) {
+    private PrismCut(Prism prism, Grid grid, List<Side> sides, Pieces pieces, double area) {
         this.prism = prism;
         this.grid = grid;
         this.sides = sides;
@@ -38,6 +39,7 @@ public final class PrismCut {
                 sides.stream().mapToInt(side -> items.indexOf(side.item())).toArray();
         this.pieces = pieces;
         this.coverage = new Coverage(pieces);
+        this.area = area;
     }
 
     /**
@@ -67,8 +69,9 @@ public final class PrismCut {
                 doubledArea.selfAdd((xs[i] - xs[0]) * (ys[next] - ys[0]) - (xs[next] - xs[0]) * (ys[i] - ys[0]));
             }
         }
-        PrismCut cut = new PrismCut(prism, grid, List.copyOf(sides), new Pieces(walked));
-        cut.checkArea(0.5 * doubledArea.doubleValue() * grid.planUnit() * grid.planUnit());
+        double area = 0.5 * doubledArea.doubleValue() * grid.planUnit() * grid.planUnit();
+        PrismCut cut = new PrismCut(prism, grid, List.copyOf(sides), new Pieces(walked), area);
+        cut.checkArea();
         return cut;
     }
 
@@ -85,7 +88,7 @@ public final class PrismCut {
     }
 
     /** Adds in twice the precision, since rounding grows with the number of cells and they may be millions. */
-    private void checkArea(double shoelace) {
+    private void checkArea() {
         DD covered = new DD(0);
         double touched = 0;
         for (int row = coverage.window().row(); row < coverage.window().rowEnd(); row++) {
@@ -95,9 +98,9 @@ public final class PrismCut {
                 touched += share == 0 ? 0 : grid.area(row, column);
             }
         }
-        if (!(Math.abs(covered.doubleValue() - shoelace) <= AREA_AGREES * touched)) {
+        if (!(Math.abs(covered.doubleValue() - area) <= AREA_AGREES * touched)) {
             throw new ProgramFault("The cells of prism \"" + prism.name() + "\" cover " + covered.doubleValue()
-                    + ", but its polygon has an area of " + shoelace + ".");
+                    + ", but its polygon has an area of " + area + ".");
         }
     }
 
@@ -129,6 +132,13 @@ public final class PrismCut {
      */
     public int item(int side) {
         return itemOfSide[side];
+    }
+
+    /**
+     * {@return the prism's plan area, islands taken out, in length units squared}
+     */
+    public double area() {
+        return area;
     }
 
     /**

@@ -1,5 +1,6 @@
 package org.seepledger.prism;
 
+import java.util.ArrayList;
 import java.util.List;
 
 /**
@@ -23,5 +24,24 @@ public record Ring(int part, int island, List<Side> sides) {
      */
     public Side after(int index) {
         return sides.get((index + 1) % sides.size());
+    }
+
+    /**
+     * {@return rings part by part: an outer ring, then its islands}
+     *
+     * @param rings the outer ring of each part, each followed by its islands
+     */
+    public static List<List<Ring>> byPart(List<Ring> rings) {
+        List<List<Ring>> parts = new ArrayList<>();
+        int begin = 0;
+        while (begin < rings.size()) {
+            int end = begin + 1;
+            while (end < rings.size() && rings.get(end).island > 0) {
+                end++;
+            }
+            parts.add(rings.subList(begin, end));
+            begin = end;
+        }
+        return parts;
     }
 }

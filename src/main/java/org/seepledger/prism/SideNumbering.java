@@ -1,7 +1,9 @@
 package org.seepledger.prism;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
+import java.util.Optional;
 import org.locationtech.jts.algorithm.Orientation;
 import org.locationtech.jts.geom.Coordinate;
 
@@ -60,13 +62,26 @@ public final class SideNumbering {
      * @param closed at least three different vertices in map coordinates, none repeated, and the first again
      */
     public Ring number(int part, int island, Coordinate[] closed) {
+        return number(part, island, closed, Collections.nCopies(closed.length - 1, Optional.empty()));
+    }
+
+    /**
+     * {@return the ring through the given vertices, its sides under the boundaries that they are in}
+     *
+     * @param part the number of the part, from 1
+     * @param island the number of the island in its part, from 1; 0 for the outer ring
+     * @param closed at least three different vertices in map coordinates, none repeated, and the first again
+     * @param boundaries for each side, in the order given, the boundary that it is in, if any
+     */
+    public Ring number(int part, int island, Coordinate[] closed, List<Optional<String>> boundaries) {
         int count = closed.length - 1;
         boolean turned = Orientation.isCCW(closed) != (island == 0);
         List<Side> sides = new ArrayList<>(count);
         for (int i = 0; i < count; i++) {
             Coordinate vertex = closed[turned ? count - i : i];
             String name = side(part, island, i + 1);
-            sides.add(new Side(name, name, vertex.x, vertex.y));
+            String item = boundaries.get(turned ? count - 1 - i : i).orElse(name);
+            sides.add(new Side(name, item, vertex.x, vertex.y));
         }
         return new Ring(part, island, sides);
     }

@@ -90,25 +90,25 @@ public final class BalanceSummary {
 
     private void writeTerms(PrismResult result) {
         List<Term> sorted = Term.bySize(result.terms());
-        double time = result.record().period().duration();
         double throughput = result.record().totals().throughput();
         TextTable table = new TextTable().row("", "in", "out", "net", "of throughput");
         for (Term term : sorted.subList(0, Math.min(TERMS_SHOWN, sorted.size()))) {
             String share = Figures.percent(throughput == 0 ? Double.NaN : 100 * Math.abs(term.net()) / throughput);
-            addRow(table, term.name(), term.inflow(), term.outflow(), time, share);
+            addRow(table, term.name(), term.inflow(), term.outflow(), result.record(), share);
         }
         if (sorted.size() > TERMS_SHOWN) {
             List<Term> rest = sorted.subList(TERMS_SHOWN, sorted.size());
             double inflow = rest.stream().mapToDouble(Term::inflow).sum();
             double outflow = rest.stream().mapToDouble(Term::outflow).sum();
-            addRow(table, Wording.counted(rest.size(), "smaller term"), inflow, outflow, time, "");
+            addRow(table, Wording.counted(rest.size(), "smaller term"), inflow, outflow, result.record(), "");
         }
         text.append("  Largest terms in ").append(units.rate()).append(":\n");
         table.appendTo(text, "    ");
     }
 
-    private void addRow(TextTable table, String name, double inflow, double outflow, double time, String share) {
-        table.row(name, rate(inflow, time), rate(outflow, time), rate(inflow - outflow, time), share);
+    private void addRow(
+            TextTable table, String name, double inflow, double outflow, PeriodBudget record, String share) {
+        table.row(name, rate(inflow, record), rate(outflow, record), rate(inflow - outflow, record), share);
     }
 
     private void writeWhereabouts(Whereabouts where, PeriodBudget record) {
@@ -122,7 +122,9 @@ public final class BalanceSummary {
         HotSpots.append(text, aquifer.grid(), where.largest(), unit, units.rateFactor(), throughput);
     }
 
-    private String rate(double volume, double time) {
-        return Figures.shown(volume / time * units.rateFactor());
+    /** A rate over the record; rounding of the terms that make the throughput counts as 0. */
+    private String rate(double volume, PeriodBudget record) {
+        double factor = units.rateFactor() / record.period().duration();
+        return Figures.shown(volume * factor, record.totals().throughput() * factor);
     }
 }

@@ -3,6 +3,7 @@ package org.seepledger.report;
 import java.util.ArrayList;
 import java.util.List;
 import org.seepledger.ledger.Totals;
+import org.seepledger.unit.Figures;
 
 /** Whether a budget closes, in words. */
 final class ClosureWords {
@@ -36,9 +37,9 @@ final class ClosureWords {
         List<String> sentences = new ArrayList<>();
         sentences.add(overTheRecord());
         result.worstPeriod()
-                .ifPresent(
-                        worst -> sentences.add("Worst period: " + worst.period().name() + ", "
-                                + wording.percent(worst.totals().closureError()) + "."));
+                .ifPresent(worst -> sentences.add("Worst period: "
+                        + worst.period().name() + ", "
+                        + wording.percent(Figures.withoutRounding(worst.totals().closureError(), 100)) + "."));
         return sentences;
     }
 
@@ -51,9 +52,9 @@ final class ClosureWords {
             return "Nothing flows: there is nothing to close.";
         }
         return (result.closesToRounding() ? "Closes to rounding: closure error " : "Closure error ")
-                + wording.percent(totals.closureError()) + " of throughput ("
-                + wording.percent(totals.netClosureError()) + " of net flow): "
-                + wording.rate(totals.residual(), time) + " of "
+                + wording.percent(Figures.withoutRounding(totals.closureError(), 100)) + " of throughput ("
+                + wording.percent(Figures.withoutRounding(totals.netClosureError(), 100)) + " of net flow): "
+                + wording.rate(Figures.withoutRounding(totals.residual(), totals.throughput()), time) + " of "
                 + wording.rate(totals.throughput(), time) + " is unexplained.";
     }
 
@@ -62,8 +63,8 @@ final class ClosureWords {
         if (through >= THROUGH_FLOW * totals.throughput()) {
             sentences.add("Of that throughput, "
                     + wording.percent(100 * through / totals.throughput())
-                    + " goes in and out through the same items or at different times, and would be less or more if sides"
-                    + " were drawn otherwise. Set against net flow, the closure error does not depend on it.");
+                    + " goes in and out again through the same items, at other places or times; for sides, how much depends"
+                    + " on how they are drawn. The closure error set against net flow leaves it out.");
         }
     }
 }

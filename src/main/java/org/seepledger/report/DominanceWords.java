@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.function.ToDoubleFunction;
+import org.seepledger.ledger.Group;
 
 /** What a budget's gains and losses are made of, in words. */
 final class DominanceWords {
@@ -20,12 +21,12 @@ final class DominanceWords {
 
     List<String> sentences() {
         List<String> sentences = new ArrayList<>();
-        add(sentences, "gains", Term::inflow);
-        add(sentences, "losses", Term::outflow);
+        add(sentences, "gains", "release from", Term::inflow);
+        add(sentences, "losses", "uptake into", Term::outflow);
         return sentences;
     }
 
-    private void add(List<String> sentences, String what, ToDoubleFunction<Term> volume) {
+    private void add(List<String> sentences, String what, String storage, ToDoubleFunction<Term> volume) {
         List<Term> terms = result.terms().stream()
                 .filter(term -> term.quantified() && volume.applyAsDouble(term) > 0)
                 .sorted(Comparator.comparingDouble(term -> -volume.applyAsDouble(term)))
@@ -41,7 +42,9 @@ final class DominanceWords {
                 .map(term -> term.name() + " (" + wording.rate(volume.applyAsDouble(term), time) + ", "
                         + wording.percent(100 * volume.applyAsDouble(term) / all) + ")")
                 .toList();
-        sentences.add("Of all " + what + ", " + wording.rate(all, time) + " gross, the largest "
-                + (largest.size() == 1 ? "is " : "are ") + Wording.listed(largest) + ".");
+        boolean stored = terms.stream().anyMatch(term -> term.group() == Group.STORAGE);
+        sentences.add("Of all " + what + (stored ? ", " + storage + " storage among them, " : ", ")
+                + wording.rate(all, time) + " gross, the largest " + (largest.size() == 1 ? "is " : "are ")
+                + Wording.listed(largest) + ".");
     }
 }

@@ -155,8 +155,8 @@ public final class InspectionText {
         facts.fact("throughput", Figures.shown(throughput) + " " + rateUnit);
         facts.fact(
                 "residual",
-                Figures.shown(totals.residual() / time) + " " + rateUnit + ", " + Figures.percent(totals.closureError())
-                        + " of throughput");
+                Figures.shown(totals.residual() / time, throughput) + " " + rateUnit + ", "
+                        + Figures.percent(totals.closureError()) + " of throughput");
         facts.fact(
                 "cell imbalance",
                 Figures.shown(where.magnitude()) + " " + rateUnit + " regardless of sign, "

@@ -3,6 +3,7 @@ package org.seepledger.report;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
+import org.seepledger.ledger.Group;
 import org.seepledger.ledger.Totals;
 
 /** What a budget cannot carry, in words: terms that drown in the residual or in their own uncertainty, and what closure does not show. */
@@ -44,7 +45,7 @@ final class LimitWords {
 
     private void addNotGiven(List<String> sentences) {
         List<String> names = terms.stream()
-                .filter(term -> !term.quantified())
+                .filter(term -> !term.quantified() && (result.storageKnown() || term.group() != Group.STORAGE))
                 .map(Term::name)
                 .toList();
         if (!names.isEmpty()) {

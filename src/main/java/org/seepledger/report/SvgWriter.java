@@ -9,21 +9,28 @@ import java.math.BigDecimal;
 import java.math.RoundingMode;
 import java.util.Base64;
 import java.util.Locale;
+import java.util.Optional;
 import java.util.stream.Collectors;
 import javax.imageio.ImageIO;
 import javax.xml.stream.XMLOutputFactory;
 import javax.xml.stream.XMLStreamException;
 import javax.xml.stream.XMLStreamWriter;
+import org.seepledger.picture.Hatch;
 import org.seepledger.picture.Ink;
 import org.seepledger.picture.Mark;
 import org.seepledger.picture.Picture;
 
 /**
- * Writes a picture as SVG 1.1 (W3C 2011): as an element of a page that has {@link InkStyle#css} and one
- * {@link #textures}, or as a file of its own. Coordinates are written to a hundredth of a pixel.
+ * Writes a picture as SVG 1.1 (W3C 2011): as an element of a page that has {@link InkStyle#css}, or
+ * as a file of its own. Coordinates are written to a hundredth of a pixel.
  */
 public final class SvgWriter {
 
+    /** How strong the ground below a texture is. */
+    private static final double GROUND = 0.3;
+
+    private static final double LINE = 1.6;
+    private static final double DOT = 3;
     private static final String SVG = "http://www.w3.org/2000/svg";
 
     private final XMLStreamWriter xml;
@@ -65,26 +72,12 @@ public final class SvgWriter {
                     writer.xml.writeAttribute("width", number(picture.width()));
                     writer.xml.writeAttribute("height", number(picture.height()));
                     writer.words("style", "style", InkStyle.css());
-                    writer.writeTextures();
                     writer.xml.writeEmptyElement("rect");
                     writer.xml.writeAttribute("width", "100%");
                     writer.xml.writeAttribute("height", "100%");
                     writer.xml.writeAttribute("class", InkStyle.fill(Ink.Token.PAPER));
                     writer.close(picture);
                 });
-    }
-
-    /** {@return an element without extent that a page needs once, before its pictures} */
-    public static String textures() {
-        return text("textures", writer -> {
-            writer.xml.writeStartElement("svg");
-            writer.xml.writeAttribute("width", "0");
-            writer.xml.writeAttribute("height", "0");
-            writer.xml.writeAttribute("aria-hidden", "true");
-            writer.xml.writeAttribute("style", "position:absolute");
-            writer.writeTextures();
-            writer.xml.writeEndElement();
-        });
     }
 
     private static String text(String id, Writing writing) {
@@ -124,18 +117,6 @@ public final class SvgWriter {
         xml.writeEndElement();
     }
 
-    private void writeTextures() throws XMLStreamException {
-        xml.writeStartElement("defs");
-        for (Ink.Token token : Ink.Token.values()) {
-            for (Mark.Texture texture : Mark.Texture.values()) {
-                if (texture != Mark.Texture.PLAIN) {
-                    SvgTexture.write(xml, token, texture);
-                }
-            }
-        }
-        xml.writeEndElement();
-    }
-
     private void write(Mark mark) throws XMLStreamException {
         if (mark instanceof Mark.Line line) {
             xml.writeEmptyElement("path");
@@ -153,14 +134,54 @@ public final class SvgWriter {
     }
 
     private void write(Mark.Area area) throws XMLStreamException {
+        Optional<Mark.Fill> textured = area.fill().filter(fill -> fill.texture() != Mark.Texture.PLAIN);
+        writeRings(
+                area,
+                textured.map(SvgWriter::ground).or(area::fill),
+                textured.isPresent() ? Optional.empty() : area.stroke());
+        if (textured.isPresent()) {
+            writeHatch(area, textured.get());
+            if (area.stroke().isPresent()) {
+                writeRings(area, Optional.empty(), area.stroke());
+            }
+        }
+    }
+
+    /** What lies faintly below a texture. */
+    private static Mark.Fill ground(Mark.Fill fill) {
+        return new Mark.Fill(fill.ink(), GROUND * fill.opacity(), Mark.Texture.PLAIN);
+    }
+
+    private void writeRings(Mark.Area area, Optional<Mark.Fill> fill, Optional<Mark.Stroke> stroke)
+            throws XMLStreamException {
         xml.writeEmptyElement("path");
         xml.writeAttribute(
                 "d", area.rings().stream().map(ring -> path(ring, "Z")).collect(Collectors.joining()));
         xml.writeAttribute("fill-rule", "evenodd");
         Paint paint = new Paint();
-        area.fill().ifPresentOrElse(paint::fill, paint::empty);
-        area.stroke().ifPresent(paint::outline);
+        fill.ifPresentOrElse(paint::fill, paint::empty);
+        stroke.ifPresent(paint::outline);
         paint.write();
+    }
+
+    /** A texture as lines, which print sharp; a pattern would be made an image for each area that it fills. */
+    private void writeHatch(Mark.Area area, Mark.Fill fill) throws XMLStreamException {
+        String lines = Hatch.of(area.rings(), fill.texture()).stream()
+                .map(segment -> path(segment, ""))
+                .collect(Collectors.joining());
+        if (!lines.isEmpty()) {
+            boolean dots = fill.texture() == Mark.Texture.DOTS;
+            xml.writeEmptyElement("path");
+            xml.writeAttribute("d", lines);
+            xml.writeAttribute("stroke-linecap", dots ? "round" : "butt");
+            if (fill.opacity() < 1) {
+                xml.writeAttribute("stroke-opacity", number(fill.opacity()));
+            }
+            new Paint()
+                    .empty()
+                    .outline(Mark.Stroke.of(fill.ink(), dots ? DOT : LINE))
+                    .write();
+        }
     }
 
     private void write(Mark.Text text) throws XMLStreamException {
@@ -263,11 +284,7 @@ public final class SvgWriter {
         }
 
         Paint fill(Mark.Fill fill) {
-            if (fill.texture() != Mark.Texture.PLAIN && fill.ink() instanceof Ink.Token token) {
-                style.append("fill:url(#")
-                        .append(SvgTexture.name(token, fill.texture()))
-                        .append(");");
-            } else if (fill.ink() instanceof Ink.Token token) {
+            if (fill.ink() instanceof Ink.Token token) {
                 in(InkStyle.fill(token));
             } else {
                 style.append("fill:").append(fill.ink()).append(';');

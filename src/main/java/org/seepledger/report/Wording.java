@@ -86,8 +86,16 @@ public final class Wording {
      * @param unit the unit
      */
     public String unit(Measure unit) {
-        String text = unit.toString();
-        return typeset ? text.replaceAll("(?<=[A-Za-z])2\\b", "²").replaceAll("(?<=[A-Za-z])3\\b", "³") : text;
+        return typeset ? raised(unit) : unit.toString();
+    }
+
+    /**
+     * {@return a unit with its powers raised}
+     *
+     * @param unit the unit
+     */
+    public static String raised(Measure unit) {
+        return unit.toString().replaceAll("(?<=[A-Za-z])2\\b", "²").replaceAll("(?<=[A-Za-z])3\\b", "³");
     }
 
     /**

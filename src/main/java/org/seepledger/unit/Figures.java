@@ -12,6 +12,11 @@ public final class Figures {
 
     private static final double SMALL = 1e-4;
     private static final double LARGE = 1e12;
+
+    /** Sums of some thousand terms in double precision are as exact as this. */
+    private static final double ROUNDING = 1e-12;
+
+    private static final int DIGITS = 4;
     private static final Pattern POWER_OF_TEN = Pattern.compile("e([+-]\\d+)");
     private static final String RAISED = "⁰¹²³⁴⁵⁶⁷⁸⁹";
 
@@ -33,9 +38,29 @@ public final class Figures {
         if (magnitude < SMALL || magnitude >= LARGE) {
             return String.format(Locale.ROOT, "%.3e", value);
         }
-        BigDecimal rounded = new BigDecimal(value).round(new MathContext(4));
+        BigDecimal rounded = new BigDecimal(value).round(new MathContext(DIGITS));
         int decimals = Math.max(0, rounded.scale());
         return String.format(Locale.ROOT, "%,." + decimals + "f", rounded).replace(',', ' ');
+    }
+
+    /**
+     * {@return a number as {@link #shown(double)}, but 0 where it is nothing but rounding}
+     *
+     * @param value the number
+     * @param scale the magnitude of the numbers that it was reckoned from
+     */
+    public static String shown(double value, double scale) {
+        return shown(withoutRounding(value, scale));
+    }
+
+    /**
+     * {@return a number, but 0 where it is nothing but rounding}
+     *
+     * @param value the number
+     * @param scale the magnitude of the numbers that it was reckoned from
+     */
+    public static double withoutRounding(double value, double scale) {
+        return Math.abs(value) < ROUNDING * scale ? 0 : value;
     }
 
     /**
@@ -59,6 +84,29 @@ public final class Figures {
      */
     public static String typeset(double value) {
         return typeset(shown(value));
+    }
+
+    /**
+     * {@return a number for a column of numbers in page and window: as {@link #typeset(double)}, but with four significant
+     * digits even where the last are zeros, so that figures that change do not jump}
+     *
+     * @param value the number
+     */
+    public static String tabular(double value) {
+        String shown = shown(value);
+        int digits = (int) shown.chars().filter(Character::isDigit).count() - leadingZeros(shown);
+        boolean plain = value != 0 && !Double.isNaN(value) && shown.indexOf('e') < 0;
+        if (plain && digits < DIGITS) {
+            shown += (shown.indexOf('.') < 0 ? "." : "") + "0".repeat(DIGITS - digits);
+        }
+        return typeset(shown);
+    }
+
+    private static int leadingZeros(String shown) {
+        return (int) shown.chars()
+                .filter(sign -> sign != '-' && sign != '.')
+                .takeWhile(sign -> sign == '0')
+                .count();
     }
 
     /**

@@ -73,6 +73,7 @@ class CellSharesTest {
         double width = grid.x().edge(1000);
         double height = grid.y().edge(1000);
         PrismCut cut = PrismCut.of(Prisms.of("all", 0, 0, Shapes.box(0, 0, width, height)), grid);
+        assertThat(cut.area()).isCloseTo(width * height, within(1e-12 * width * height));
         assertThat(cut.coverage().share(999, 0)).isEqualTo(1);
         double[] round = Shapes.round(width / 2, height / 2, height / 2, 5000);
         assertThat(PrismCut.of(Prisms.of("round", 0, 0, round), grid).pieces().count())

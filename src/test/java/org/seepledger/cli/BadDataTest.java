@@ -51,8 +51,8 @@ class BadDataTest {
                 key("grids", "1", "aquifer.json: found the unknown key \"grids\"", "Did you mean \"grid\"?"),
                 key("grid/rotatoin", "5", "aquifer.json, grid:", "\"rotatoin\"", "Did you mean \"rotation\"?"),
                 key("grid/x/stepp", "5", "aquifer.json, grid.x:", "Did you mean \"step\"?"),
-                key("layers", "[{'top': 1, 'botom': 0}]", "aquifer.json, layers[0]:", "Did you mean \"bottom\"?"),
-                key("head", "[9, {'file': 'h.csv', 'colum': 'h'}]", "head[1]:", "Did you mean \"column\"?"),
+                key("layers", "[{'top': 1, 'botom': 0}]", "aquifer.json, layers, entry 1:", "Did you mean \"bottom\"?"),
+                key("head", "[9, {'file': 'h.csv', 'colum': 'h'}]", "head, entry 2:", "Did you mean \"column\"?"),
                 key("flow/outer_faces", "{'side': 'open'}", "flow.outer_faces:", "Did you mean \"sides\"?"),
                 key("flow/xx", "1", "aquifer.json, flow:", "\"xx\"", "Did you mean \"x\"?"),
                 key(
@@ -66,22 +66,22 @@ class BadDataTest {
                 key(
                         "sources",
                         "[{'category': 'a', 'kind': 'areal', 'rate': 0, 'refrence': 'b'}]",
-                        "sources[0]:",
+                        "sources, entry 1:",
                         "Did you mean \"reference\"?"),
                 key(
                         "sources",
                         "[{'category': 'a', 'kind': 'points', 'rate': 0, 'file': 'w.csv'}]",
-                        "sources[0].rate",
+                        "sources, entry 1, rate",
                         "correct the kind"),
-                key("sources", "[{'category': 'a', 'kind': 'points'}]", "sources[0]: found no \"file\""),
-                key("sources", "[{'category': 'a', 'kind': 'areal'}]", "sources[0]: found no \"rate\""),
-                key("sources", "[{'kind': 'areal', 'rate': 0}]", "sources[0]: found no \"category\""),
-                key("storage", "{'supplied': [{'rate': 0}]}", "storage.supplied[0]: found no \"item\""),
+                key("sources", "[{'category': 'a', 'kind': 'points'}]", "sources, entry 1: found no \"file\""),
+                key("sources", "[{'category': 'a', 'kind': 'areal'}]", "sources, entry 1: found no \"rate\""),
+                key("sources", "[{'kind': 'areal', 'rate': 0}]", "sources, entry 1: found no \"category\""),
+                key("storage", "{'supplied': [{'rate': 0}]}", "storage.supplied, entry 1: found no \"item\""),
                 bad("no times", files -> files.without("times"), "no \"times\"", "Instants in time_unit"),
                 bad("no flow", files -> files.without("flow"), "found no \"flow\""),
                 bad("no kind", files -> files.without("flow/kind"), "aquifer.json, flow: found no \"kind\""),
                 bad("no y", files -> files.without("flow/y"), "aquifer.json, flow: found no \"y\""),
-                bad("no top", files -> files.with("layers", "[{'bottom': 0}]"), "layers[0]: found no \"top\""),
+                bad("no top", files -> files.with("layers", "[{'bottom': 0}]"), "layers, entry 1: found no \"top\""),
                 bad(
                         "no step",
                         files -> files.without("grid/x/step"),
@@ -95,7 +95,7 @@ class BadDataTest {
         return Stream.of(
                 key("times", "[0]", "times: found the list [0]; expected at least 2 entries"),
                 key("times", "'x'", "times: found \"x\"; expected a list in brackets"),
-                key("times", "[0, 'a']", "times[1]: found \"a\"; expected a number"),
+                key("times", "[0, 'a']", "times, entry 2: found \"a\"; expected a number"),
                 key("times", "[0, 10, 10]", "times:", "instants must increase", "10.0"),
                 key("grid/x/step", "0", "grid.x.step: found 0; expected a number greater than 0"),
                 key("grid/x/count", "2.5", "grid.x.count: found 2.5; expected a whole number"),
@@ -104,7 +104,11 @@ class BadDataTest {
                 key("flow/kind", "'darcy'", "flow.kind: found \"darcy\"", "one of \"darcy_flux\", \"face_flow\""),
                 key("flow/outer_faces", "{'top': 'ajar'}", "outer_faces.top: found \"ajar\"", "\"open\", \"closed\""),
                 key("layers", "[]", "layers: found the list []; expected at least 1 entry"),
-                key("layers", "[{'top': true, 'bottom': 0}]", "layers[0].top: found true", "a number, a text in quot"),
+                key(
+                        "layers",
+                        "[{'top': true, 'bottom': 0}]",
+                        "layers, entry 1, top: found true",
+                        "a number, a text in quot"),
                 key("head", "{'value': 'x'}", "head.value: found \"x\"; expected a number"),
                 key("head", "{'file': 'h.tif', 'band': 0}", "head.band: found 0; expected a number of 1 or more"),
                 key(
@@ -134,7 +138,10 @@ class BadDataTest {
                 key("solutes", "[{'name': 'a', 'porosty': 0.2}]", "Did you mean \"porosity\"?"),
                 key("solutes", "[{'porosity': 0.2}]", "found no \"name\""),
                 key("solutes", "[{'name': 'a'}, {'name': 'a'}]", "\"a\"", "names that differ"),
-                key("solutes", "[{'name': 'a', 'porosity': {'value': 1, 'unit': 'm'}}]", "porosity: found the unit"),
+                key(
+                        "solutes",
+                        "[{'name': 'a', 'porosity': {'value': 1, 'unit': 'm'}}]",
+                        "solutes, entry 1, porosity: found the unit"),
                 key("solutes", "[{'name': 'a', 'sorption': {'isotherm': 'straight'}}]", "one of \"linear\""),
                 key(
                         "solutes",
@@ -170,12 +177,12 @@ class BadDataTest {
                         "[{'category': 'rain', 'kind': 'areal', 'rate': 1, 'concentration': {'chlorid': 1}}]",
                         "unknown solute \"chlorid\""),
                 key("solutes", "[{'name': 'a', 'half_life': true}]", "half_life: found true"),
-                key("sources", AREAL.formatted("{'value': 1, 'unit': 'm3/d'}"), "sources[0].rate:", "\"m/d\""),
+                key("sources", AREAL.formatted("{'value': 1, 'unit': 'm3/d'}"), "sources, entry 1, rate:", "\"m/d\""),
                 key("sources", "[{'category': '', 'kind': 'areal', 'rate': 0}]", "category: found \"\"", "not empty"),
                 key(
                         "sources",
                         "[{'category': 'a', 'kind': 'areal', 'rate': 0, 'uncertainty': {'percent': -1}}]",
-                        "sources[0].uncertainty.percent: found -1; expected a number of 0 or more"),
+                        "sources, entry 1, uncertainty.percent: found -1; expected a number of 0 or more"),
                 bad(
                         "times without end",
                         files -> files.with("times", "[0, 1e300]").with("start_date", "'2021-10-01'"),
@@ -216,7 +223,7 @@ class BadDataTest {
                 bad(
                         "placeholder for surfaces",
                         files -> files.with("layers", "[{'top': 10, 'bottom': 'b_{interval}.tif'}]"),
-                        "layers[0].bottom:",
+                        "layers, entry 1, bottom:",
                         "with {interval}",
                         "does not change"),
                 bad(

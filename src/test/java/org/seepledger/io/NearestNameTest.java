@@ -2,8 +2,12 @@ package org.seepledger.io;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import java.util.List;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
 
 class NearestNameTest {
 
@@ -14,6 +18,14 @@ class NearestNameTest {
         assertThat(NearestName.distance("Layers", "layers")).isZero();
         assertThat(NearestName.distance("", "abc")).isEqualTo(3);
         assertThat(NearestName.distance("a".repeat(1_000_000), "b")).isEqualTo(1_000_000);
+    }
+
+    @Test
+    void findsTheFileBesideAPath(@TempDir Path folder) throws IOException {
+        Files.writeString(folder.resolve("prisms.geojson"), "");
+        assertThat(NearestName.besides(folder.resolve("prism.geojson"))).contains("prisms.geojson");
+        assertThat(NearestName.besides(folder.resolve("other.csv"))).isEmpty();
+        assertThat(NearestName.besides(folder.resolve("none/prism.geojson"))).isEmpty();
     }
 
     @Test

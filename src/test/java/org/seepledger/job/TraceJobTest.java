@@ -19,6 +19,8 @@ import org.apache.commons.csv.CSVRecord;
 import org.assertj.core.data.Offset;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.seepledger.aquifer.Window;
 import org.seepledger.balance.Periods;
 import org.seepledger.balance.WellRule;
@@ -126,8 +128,10 @@ class TraceJobTest {
         }
         if (file.equals("aquifer.json")) {
             JsonNode root = new ObjectMapper().readTree(path.toFile());
-            return root.at("/" + place.replace("[", "/").replace("]", "").replace('.', '/'))
-                    .doubleValue();
+            String counted = Pattern.compile(", entry (\\d+)")
+                    .matcher(place)
+                    .replaceAll(entry -> "/" + (Integer.parseInt(entry.group(1)) - 1));
+            return root.at("/" + counted.replace(", ", "/").replace('.', '/')).doubleValue();
         }
         Matcher line = IN_LINE.matcher(place);
         if (line.matches()) {
@@ -176,7 +180,7 @@ class TraceJobTest {
                 .filteredOn(line -> line.get("value").equals("-999.0"))
                 .isNotEmpty()
                 .allMatch(line -> line.get("weight").equals("0.0"));
-        assertThat(lines).anyMatch(line -> line.get("place").equals("layers[0].bottom"));
+        assertThat(lines).anyMatch(line -> line.get("place").equals("layers, entry 1, bottom"));
         assertThat(lines).anyMatch(line -> line.get("place").equals("head.offset"));
     }
 
@@ -196,6 +200,25 @@ class TraceJobTest {
                 .isInstanceOf(UsageFault.class)
                 .hasMessageContaining("residual");
         assertThat(folder.resolve("trace.csv")).doesNotExist();
+    }
+
+    /** The prism is called a/b. */
+    @ParameterizedTest
+    @CsvSource(
+            delimiter = '|',
+            value = {
+                "a/c/record/side 1/1 | no prism \"a/c\". The nearest is \"a/b\".",
+                "a/b/recrod/side 1/1 | no period \"recrod\". The nearest is \"record\".",
+                "a/b/record/sidr 3/1 | no item and layer \"sidr 3/1\". The nearest is \"side 3/1\".",
+                "a/b | nothing follows the prism \"a/b\"",
+                "a/b/record/unheard-of thing/7 | \"side 3\"",
+            })
+    void namesTheNearestOfWhatThereIsNot(String row, String words) throws IOException {
+        SmallSets.heads(folder.resolve("set"));
+        assertThatThrownBy(() -> trace(row, false))
+                .isInstanceOf(UsageFault.class)
+                .hasMessageContaining(words)
+                .hasMessageEndingWith("Name it as PRISM/PERIOD/ITEM/LAYER, with the words of budget.csv.");
     }
 
     @Test

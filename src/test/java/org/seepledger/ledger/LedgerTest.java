@@ -143,6 +143,25 @@ class LedgerTest {
     }
 
     @Test
+    void linesAddUpGroupsByLayerAndLeaveOutWhatCannotBeGiven() {
+        List<Entry> entries = List.of(
+                new Entry(new Account(Group.SIDE, "side 1", 0, true), 1, 2),
+                new Entry(new Account(Group.SIDE, "side 2", 0, true), 3, 4),
+                new Entry(new Account(Group.SIDE, "side 1", 1, true), 5, 6),
+                new Entry(new Account(Group.SIDE, "side 2", 1, false), Double.NaN, Double.NaN),
+                new Entry(new Account(Group.STORAGE, "elastic storage", 0, true), 7, 8));
+        assertThat(Line.byLayer(entries))
+                .containsExactly(
+                        new Line(Group.SIDE, "", 0, 4, 6),
+                        new Line(Group.SIDE, "", 1, 5, 6),
+                        new Line(Group.STORAGE, "", 0, 7, 8));
+        assertThat(Line.each(entries))
+                .hasSize(5)
+                .element(3)
+                .satisfies(line -> assertThat(line.net()).isNaN());
+    }
+
+    @Test
     void groupsAreWrittenInSmallLetters() {
         assertThat(Group.values())
                 .extracting(Group::toString)

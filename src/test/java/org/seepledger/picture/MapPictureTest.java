@@ -9,7 +9,6 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
-import org.seepledger.aquifer.PlacedWell;
 import org.seepledger.aquifer.Screen;
 import org.seepledger.balance.HotSpot;
 import org.seepledger.prism.Prism;
@@ -26,7 +25,14 @@ class MapPictureTest {
 
     private static Picture map(Map<String, Double> flows) {
         return MapPicture.ofFaces(
-                PRISM, List.of(), List.of(), Optional.empty(), Optional.empty(), Scene.budget(flows), RATE, WIDTH);
+                Scene.aquifer(),
+                PRISM,
+                List.of(),
+                Optional.empty(),
+                Optional.empty(),
+                Scene.budget(flows),
+                RATE,
+                WIDTH);
     }
 
     private static Map<String, Double> flows(double south, double east, double north, double west) {
@@ -86,9 +92,9 @@ class MapPictureTest {
         Map<String, Double> flows = new HashMap<>();
         round.rings().get(0).sides().forEach(side -> flows.put("side:" + side.item(), side.x() - 1150.5));
         Picture map = MapPicture.ofFaces(
+                Scene.aquifer(Scene.well("W1", 1150, 2100, new Screen.InLayer(0))),
                 round,
                 List.of(PRISM),
-                List.of(PlacedWell.of(Scene.well("W1", 1150, 2100, new Screen.InLayer(0)), Scene.GRID)),
                 Optional.empty(),
                 Optional.of(SectionLine.through(round, Scene.GRID)),
                 Scene.budget(flows),
@@ -115,7 +121,7 @@ class MapPictureTest {
         MapPicture.Ground ground =
                 new MapPicture.Ground(drape, ValueScale.aboutZero(drape.values()), "Imbalance", "m3/d", false);
         Picture map = MapPicture.ofImbalance(
-                PRISM, ground, List.of(new HotSpot(0, 10, 12, 3), new HotSpot(0, 7, 20, -2)), WIDTH);
+                Scene.aquifer(), PRISM, ground, List.of(new HotSpot(0, 10, 12, 3), new HotSpot(0, 7, 20, -2)), WIDTH);
         MapFrame frame = MapPicture.frame(PRISM, WIDTH);
         Mark.Text second = Scene.texts(map).stream()
                 .filter(text -> text.words().equals("2"))

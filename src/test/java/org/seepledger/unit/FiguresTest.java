@@ -22,6 +22,17 @@ class FiguresTest {
         assertThat(Figures.typeset(Double.NaN)).isEqualTo("–");
     }
 
+    /** A sum of terms of about 1000 is exact to 1e-9 at best. */
+    @Test
+    void roundingIsTakenAway() {
+        assertThat(Figures.withoutRounding(1.7e-18, 1e3)).isZero();
+        assertThat(Figures.withoutRounding(-9e-10, 1e3)).isZero();
+        assertThat(Figures.withoutRounding(-2e-9, 1e3)).isEqualTo(-2e-9);
+        assertThat(Figures.withoutRounding(1.7e-18, 1e-17)).isEqualTo(1.7e-18);
+        assertThat(Figures.withoutRounding(1.7e-18, 0)).isEqualTo(1.7e-18);
+        assertThat(Figures.withoutRounding(Double.NaN, 1)).isNaN();
+    }
+
     @Test
     void onPageAndWindowHaveATrueMinusAndDoNotBreak() {
         assertThat(Figures.typeset(-12345.6)).isEqualTo("−12\u202f350");

@@ -21,6 +21,7 @@ import org.seepledger.aquifer.StorageKnowledge;
 import org.seepledger.fault.DataFault;
 import org.seepledger.io.DataFolder;
 import org.seepledger.io.JsonFile;
+import org.seepledger.io.NearestName;
 import org.seepledger.io.crs.PlanCrs;
 import org.seepledger.io.result.Provenance;
 import org.seepledger.io.table.Frame;
@@ -57,12 +58,7 @@ public final class AquiferReader {
     public static AquiferFolder open(Path folder) {
         Path file = folder.resolve(FILE);
         if (!Files.isRegularFile(file)) {
-            throw new DataFault(
-                    folder.toString(),
-                    "",
-                    Files.isDirectory(folder) ? "no " + FILE : "no such folder",
-                    "an aquifer folder with " + FILE,
-                    "Name the folder that holds it; docs/formats.md says how it is made.");
+            throw noSet(folder);
         }
         JsonNode root = JsonFile.read(file, FILE);
         SchemaCheck.check(root);
@@ -74,6 +70,18 @@ public final class AquiferReader {
             files.close();
             throw e;
         }
+    }
+
+    private static DataFault noSet(Path folder) {
+        boolean exists = Files.isDirectory(folder);
+        Optional<String> near = exists ? Optional.empty() : NearestName.besides(folder);
+        return new DataFault(
+                folder.toString(),
+                "",
+                exists ? "no " + FILE : "no such folder",
+                "an aquifer folder with " + FILE,
+                near.map(name -> "Did you mean \"" + name + "\"?")
+                        .orElse("Name the folder that holds it; docs/formats.md says how it is made."));
     }
 
     private AquiferFolder read(Path file) {
@@ -135,7 +143,7 @@ public final class AquiferReader {
         List<Layer> layers = new ArrayList<>();
         for (int i = 0; i < nodes.size(); i++) {
             JsonNode node = nodes.get(i);
-            String place = "layers[" + i + "]";
+            String place = KeyPlace.entry("layers", i);
             if (i == 0 && !node.has("top")) {
                 throw new DataFault(
                         FILE,
@@ -148,9 +156,10 @@ public final class AquiferReader {
             layers.add(new Layer(
                     name,
                     node.has("top")
-                            ? Optional.of(surface(bindings, "top of layer " + (i + 1), node.get("top"), place + ".top"))
+                            ? Optional.of(surface(
+                                    bindings, "top of layer " + (i + 1), node.get("top"), KeyPlace.key(place, "top")))
                             : Optional.empty(),
-                    surface(bindings, "bottom of layer " + (i + 1), node.get("bottom"), place + ".bottom"),
+                    surface(bindings, "bottom of layer " + (i + 1), node.get("bottom"), KeyPlace.key(place, "bottom")),
                     node.has("water_table") ? node.get("water_table").booleanValue() : i == 0));
         }
         return layers;
@@ -166,7 +175,7 @@ public final class AquiferReader {
             JsonNode entry = node.get("supplied").get(i);
             String item = entry.get("item").textValue();
             Measure rate = Measure.power(length, 3).per(time);
-            String place = "storage.supplied[" + i + "].rate";
+            String place = KeyPlace.key(KeyPlace.entry("storage.supplied", i), "rate");
             supplied.add(new Storage.Supplied(
                     item, bindings.values(item, entry.get("rate"), place, rate, StepKind.INTERVAL)));
         }

@@ -114,7 +114,7 @@ final class Bindings {
                     throw fault("\"value\" with a band or a column", "one of them", "Give the one that is meant.");
                 }
                 double value = node.get("value").doubleValue();
-                return new BoundNumber(value, place + ".value", place, conversion(node, unit(node)));
+                return new BoundNumber(value, KeyPlace.key(place, "value"), place, conversion(node, unit(node)));
             }
             return file(node.get("file").textValue(), node);
         }
@@ -135,7 +135,7 @@ final class Bindings {
             }
             List<GriddedValues> layers = new ArrayList<>();
             for (int layer = 0; layer < node.size(); layer++) {
-                String inner = place + "[" + layer + "]";
+                String inner = KeyPlace.entry(place, layer);
                 layers.add(new Binding(inner, target, steps, repeats, below).read(node.get(layer)));
             }
             return new ByLayer(List.copyOf(layers));

@@ -37,7 +37,7 @@ record Conversion(double scale, double offset, double factor, OptionalDouble dry
             parts.add(stored.beside(stored.file(), stored.place() + ", offset", fileOffset, scale * factor));
         }
         if (offset != 0) {
-            parts.add(stored.beside(AquiferReader.FILE, key + ".offset", offset, factor));
+            parts.add(stored.beside(AquiferReader.FILE, KeyPlace.key(key, "offset"), offset, factor));
         }
         return parts;
     }

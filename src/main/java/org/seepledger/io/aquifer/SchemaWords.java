@@ -53,7 +53,7 @@ final class SchemaWords {
     }
 
     private String place() {
-        return message.getInstanceLocation().toString().replaceFirst("^\\$\\.?", "");
+        return KeyPlace.of(message.getInstanceLocation().toString());
     }
 
     private DataFault unknownKey() {

@@ -20,7 +20,7 @@ import org.seepledger.unit.Measure;
 record SoluteNode(JsonNode node, String place, String solute, Bindings bindings) {
 
     SoluteNode inside(String key) {
-        return new SoluteNode(node.path(key), place + "." + key, solute, bindings);
+        return new SoluteNode(node.path(key), KeyPlace.key(place, key), solute, bindings);
     }
 
     /** Whether a key stands there, be it with null. */
@@ -42,7 +42,7 @@ record SoluteNode(JsonNode node, String place, String solute, Bindings bindings)
             return Optional.empty();
         }
         GriddedValues given = raw(key, written, steps);
-        return Optional.of(CheckedValues.of(given, place + "." + key, bounds, written.in(target)));
+        return Optional.of(CheckedValues.of(given, KeyPlace.key(place, key), bounds, written.in(target)));
     }
 
     Optional<GriddedValues> numbers(String key, Bounds bounds) {
@@ -52,7 +52,7 @@ record SoluteNode(JsonNode node, String place, String solute, Bindings bindings)
     /** The values of a key as they stand, listed among the set's quantities. */
     GriddedValues raw(String key, Measure written, StepKind steps) {
         String name = key.replace('_', ' ') + " of " + solute;
-        return bindings.values(name, node.get(key), place + "." + key, written, steps);
+        return bindings.values(name, node.get(key), KeyPlace.key(place, key), written, steps);
     }
 
     /** The unit that a key names, which must measure the same as another. */
@@ -96,6 +96,6 @@ record SoluteNode(JsonNode node, String place, String solute, Bindings bindings)
     }
 
     DataFault fault(String key, String found, String expected, String remedy) {
-        return new DataFault(AquiferReader.FILE, place + "." + key, found, expected, remedy);
+        return new DataFault(AquiferReader.FILE, KeyPlace.key(place, key), found, expected, remedy);
     }
 }

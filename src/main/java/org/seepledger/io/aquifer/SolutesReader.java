@@ -45,7 +45,7 @@ final class SolutesReader {
         List<Solute> solutes = new ArrayList<>();
         for (int i = 0; i < nodes.size(); i++) {
             String name = nodes.get(i).get("name").textValue();
-            solutes.add(solute(new SoluteNode(nodes.get(i), "solutes[" + i + "]", name, bindings)));
+            solutes.add(solute(new SoluteNode(nodes.get(i), KeyPlace.entry("solutes", i), name, bindings)));
         }
         requireAncestors(solutes);
         return solutes;
@@ -56,8 +56,8 @@ final class SolutesReader {
         if (other != null) {
             throw new DataFault(
                     AquiferReader.FILE,
-                    "solutes[" + index + "].name",
-                    "\"" + name + "\", which solutes[" + other + "] has already",
+                    KeyPlace.key(KeyPlace.entry("solutes", index), "name"),
+                    "\"" + name + "\", which entry " + (other + 1) + " has already",
                     "names that differ",
                     "Rename one.");
         }
@@ -67,7 +67,7 @@ final class SolutesReader {
         for (int i = 0; i < sources.size(); i++) {
             Iterator<String> carried = sources.get(i).path("concentration").fieldNames();
             while (carried.hasNext()) {
-                requireKnown(carried.next(), "sources[" + i + "].concentration");
+                requireKnown(carried.next(), KeyPlace.key(KeyPlace.entry("sources", i), "concentration"));
             }
         }
     }
@@ -118,7 +118,7 @@ final class SolutesReader {
 
     private Concentration concentration(SoluteNode node, Measure unit) {
         JsonNode bound = node.node().get("concentration");
-        String place = node.place() + ".concentration";
+        String place = KeyPlace.key(node.place(), "concentration");
         double factor = unit.in(massPerLength3);
         GriddedValues values = bindings.marked("concentration of " + node.solute(), bound, place, unit);
         GriddedValues marks = bindings.marks(bound, place, unit);
@@ -158,7 +158,7 @@ final class SolutesReader {
             return Optional.empty();
         }
         String parent = node.node().get("parent").textValue();
-        requireKnown(parent, node.place() + ".parent");
+        requireKnown(parent, KeyPlace.key(node.place(), "parent"));
         GriddedValues yield = node.required(
                 "yield", node.numbers("yield", Bounds.NOT_NEGATIVE), "it is a product of \"" + parent + "\"");
         return Optional.of(new Solute.Ancestry(parent, yield));
@@ -176,7 +176,7 @@ final class SolutesReader {
                 if (ancestor.equals(name)) {
                     throw new DataFault(
                             AquiferReader.FILE,
-                            "solutes[" + i + "].parent",
+                            KeyPlace.key(KeyPlace.entry("solutes", i), "parent"),
                             "a line of parents that leads back to \"" + name + "\"",
                             "a parent that is no product of it",
                             "Correct one of the parents.");
@@ -212,7 +212,7 @@ final class SolutesReader {
             JsonNode concentrations = sources.get(i).path("concentration");
             String category = sources.get(i).get("category").textValue();
             SoluteNode node = new SoluteNode(
-                    concentrations, "sources[" + i + "].concentration", "\"" + category + "\"", bindings);
+                    concentrations, KeyPlace.key(KeyPlace.entry("sources", i), "concentration"), "\"" + category + "\"", bindings);
             int source = i;
             node.values(name, unit, massPerLength3, StepKind.INTERVAL, Bounds.NOT_NEGATIVE)
                     .ifPresent(values -> carried.put(source, values));

@@ -28,7 +28,7 @@ final class SourcesReader {
     List<Source> read(JsonNode nodes) {
         List<Source> sources = new ArrayList<>();
         for (int i = 0; i < nodes.size(); i++) {
-            sources.add(source(nodes.get(i), "sources[" + i + "]"));
+            sources.add(source(nodes.get(i), KeyPlace.entry("sources", i)));
         }
         return sources;
     }
@@ -41,12 +41,21 @@ final class SourcesReader {
                 new Source.Areal(
                         category,
                         bindings.values(
-                                category, node.get("rate"), place + ".rate", length.per(time), StepKind.INTERVAL));
+                                category,
+                                node.get("rate"),
+                                KeyPlace.key(place, "rate"),
+                                length.per(time),
+                                StepKind.INTERVAL));
             case "cells" ->
                 new Source.Cells(
                         category,
                         bindings.values(
-                                category, node.get("rate"), place + ".rate", rate, StepKind.INTERVAL, Repeats.ADDED));
+                                category,
+                                node.get("rate"),
+                                KeyPlace.key(place, "rate"),
+                                rate,
+                                StepKind.INTERVAL,
+                                Repeats.ADDED));
             default -> points(category, node.get("file").textValue(), place, rate);
         };
     }
@@ -55,7 +64,7 @@ final class SourcesReader {
         return new Source.Points(
                 category,
                 Well.of(PointsTable.read(
-                        bindings.files().path(file, place + ".file"),
+                        bindings.files().path(file, KeyPlace.key(place, "file")),
                         file,
                         category,
                         bindings.frame(),

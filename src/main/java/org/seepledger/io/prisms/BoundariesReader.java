@@ -5,19 +5,19 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Set;
 import java.util.stream.Collectors;
 import org.seepledger.fault.DataFault;
 import org.seepledger.prism.Prism;
 import org.seepledger.prism.Ring;
 import org.seepledger.prism.Side;
+import org.seepledger.prism.SideSelection;
+import org.seepledger.sketch.Names;
 
 /** Puts sides under the names that the property {@code boundaries} gives them. */
 final class BoundariesReader {
 
     private static final String FORMS =
             "such as \"side 1-14\", \"island 1\", \"island 1 side 2-3\", \"part 2\" or \"part 2 island 1 side 3\"";
-    private static final Set<String> TAKEN = Set.of("top", "bottom", Prism.GRID_EDGE);
 
     private final List<Ring> rings;
     private final boolean parts;
@@ -69,7 +69,7 @@ final class BoundariesReader {
     }
 
     private void checkName(String group) {
-        if (group.isBlank() || TAKEN.contains(group) || SideSelection.isSideName(group)) {
+        if (!Names.isBoundary(group)) {
             throw spot.fault(
                     Spot.quoted(group) + " as the name of a boundary",
                     "a name that is not empty and neither a side's, nor top, bottom or " + Prism.GRID_EDGE,

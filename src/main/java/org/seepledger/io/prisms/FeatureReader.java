@@ -5,52 +5,73 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
+import java.util.function.Consumer;
 import org.locationtech.jts.geom.Coordinate;
-import org.seepledger.ledger.ExchangeFlow;
-import org.seepledger.prism.Prism;
+import org.seepledger.fault.DataFault;
 import org.seepledger.prism.Ring;
 import org.seepledger.prism.SideNumbering;
+import org.seepledger.sketch.Flaw;
+import org.seepledger.sketch.Names;
+import org.seepledger.sketch.PolygonCheck;
+import org.seepledger.sketch.Shape;
 
-/** Makes a prism of one feature. */
+/** Makes a shape of one feature. */
 final class FeatureReader {
 
     private final RingsReader coordinates;
-    private final VerticalRangeReader ranges;
+    private final ReachReader reaches;
     private final OwnKeys keys;
+    private final Consumer<DataFault> flaws;
     private final Map<String, Integer> names = new HashMap<>();
 
-    FeatureReader(RingsReader coordinates, VerticalRangeReader ranges, OwnKeys keys) {
+    /**
+     * Reads features of one file.
+     *
+     * @param coordinates reads their rings
+     * @param reaches reads how far they reach
+     * @param keys tells of properties that look like the program's own
+     * @param flaws told what keeps rings from being a polygon; whoever wants none throws it
+     */
+    FeatureReader(RingsReader coordinates, ReachReader reaches, OwnKeys keys, Consumer<DataFault> flaws) {
         this.coordinates = coordinates;
-        this.ranges = ranges;
+        this.reaches = reaches;
         this.keys = keys;
+        this.flaws = flaws;
     }
 
-    /** {@return the prism of the feature with a number, from 1} */
-    Prism read(JsonNode feature, int number, String file) {
+    /** {@return the shape of the feature with a number, from 1} */
+    Shape read(JsonNode feature, int number, String file) {
         Spot bare = new Spot(file, "feature " + number);
         if (!"Feature".equals(feature.path("type").textValue())) {
             throw bare.fault(
                     "an object of type " + Spot.shown(feature.path("type")), "a Feature", "Correct the file there.");
         }
         JsonNode properties = feature.path("properties");
-        keys.look(properties::fieldNames, bare);
+        keys.look(properties, bare);
         String name = name(properties, bare, number);
         Spot spot = new Spot(file, bare.place() + " " + Spot.quoted(name));
-        List<Ring> rings = rings(feature.path("geometry"), properties.path("boundaries"), spot);
-        return new Prism(name, rings, ranges.read(properties, spot));
+        JsonNode geometry = feature.path("geometry");
+        boolean parts = isMadeOfParts(geometry, spot);
+        RingNames ringNames = new RingNames(new SideNumbering(parts));
+        List<Ring> plain = rings(geometry.path("coordinates"), parts, ringNames, spot);
+        List<Ring> grouped = BoundariesReader.apply(properties.path("boundaries"), plain, parts, spot.in("boundaries"));
+        return Shape.of(name, grouped, parts, reaches.read(properties, spot))
+                .noted(OwnKeys.note(properties))
+                .keeping(OwnKeys.others(properties));
     }
 
     private String name(JsonNode properties, Spot spot, int number) {
         JsonNode given = properties.path("name");
         String name = given.isTextual() ? given.textValue() : "";
-        if (name.isBlank() || !name.equals(name.strip()) || name.matches("(?s).*\\p{Cntrl}.*")) {
+        if (!Names.isPlain(name)) {
             throw spot.in("name")
                     .fault(
                             Spot.shown(given),
                             "a text that is not empty and has no blanks at its ends",
                             "Give the prism a property \"name\".");
         }
-        if (name.equals(ExchangeFlow.OUTSIDE)) {
+        if (Names.isReserved(name)) {
             throw spot.in("name")
                     .fault(
                             Spot.quoted(name) + ", which stands for all that is in no prism",
@@ -68,7 +89,7 @@ final class FeatureReader {
         return name;
     }
 
-    private List<Ring> rings(JsonNode geometry, JsonNode boundaries, Spot spot) {
+    private static boolean isMadeOfParts(JsonNode geometry, Spot spot) {
         String type = geometry.path("type").asText();
         boolean parts = type.equals("MultiPolygon");
         if (!parts && !type.equals("Polygon")) {
@@ -79,12 +100,19 @@ final class FeatureReader {
                     "a Polygon or MultiPolygon",
                     "Draw the prism as a polygon.");
         }
-        RingNames ringNames = new RingNames(new SideNumbering(parts));
-        List<List<Coordinate[]>> inFile = polygons(geometry.path("coordinates"), parts, ringNames, spot);
-        new PolygonCheck(ringNames, spot, "").check(inFile);
+        return parts;
+    }
+
+    private List<Ring> rings(JsonNode given, boolean parts, RingNames ringNames, Spot spot) {
+        List<List<Coordinate[]>> inFile = polygons(given, parts, ringNames, spot);
+        Optional<Flaw> flaw = PolygonCheck.first(inFile);
+        flaw.ifPresent(found -> flaws.accept(ringNames.fault(found, "", spot)));
         List<List<Coordinate[]>> onMap = onMap(inFile, ringNames, spot);
-        List<Ring> numbered = numbered(onMap, ringNames.numbering());
-        return BoundariesReader.apply(boundaries, numbered, parts, spot.in("boundaries"));
+        if (flaw.isEmpty() && !coordinates.keepsPlaces()) {
+            PolygonCheck.first(onMap)
+                    .ifPresent(found -> flaws.accept(ringNames.fault(found, " of the aquifer's CRS", spot)));
+        }
+        return numbered(onMap, ringNames.numbering());
     }
 
     private List<List<Coordinate[]>> polygons(JsonNode given, boolean parts, RingNames ringNames, Spot spot) {
@@ -103,17 +131,12 @@ final class FeatureReader {
 
     private List<List<Coordinate[]>> onMap(List<List<Coordinate[]>> inFile, RingNames ringNames, Spot spot) {
         List<List<Coordinate[]>> onMap = new ArrayList<>();
-        boolean same = true;
         for (int part = 1; part <= inFile.size(); part++) {
             List<Coordinate[]> rings = new ArrayList<>();
             for (Coordinate[] ring : inFile.get(part - 1)) {
                 rings.add(coordinates.onMap(ring, spot.in(ringNames.of(part, rings.size()))));
-                same &= rings.get(rings.size() - 1) == ring;
             }
             onMap.add(rings);
-        }
-        if (!same) {
-            new PolygonCheck(ringNames, spot, " of the aquifer's CRS").check(onMap);
         }
         return onMap;
     }

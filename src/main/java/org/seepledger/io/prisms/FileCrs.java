@@ -29,7 +29,8 @@ final class FileCrs {
                         .fault(
                                 Spot.shown(crs) + " though the aquifer's crs is null",
                                 "local coordinates without a crs member",
-                                "Take out the member, or name the aquifer's CRS in aquifer.json.");
+                                "Name the aquifer's CRS in aquifer.json; take the member out only if the coordinates"
+                                        + " are the aquifer's local ones.");
             }
             return PlanTransform.identity();
         }

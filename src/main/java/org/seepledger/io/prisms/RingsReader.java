@@ -6,12 +6,12 @@ import java.util.List;
 import org.locationtech.jts.geom.Coordinate;
 import org.locationtech.jts.geom.CoordinateArrays;
 import org.seepledger.io.crs.PlanTransform;
+import org.seepledger.sketch.Place;
 
 /** Reads the coordinates of polygons to closed rings, as they stand in the file and as they lie on the map. */
 final class RingsReader {
 
     private static final int MOST_VERTICES = 1_000_000;
-    private static final double FARTHEST = 1e12;
 
     private final PlanTransform transform;
     private final String remedyForDegrees;
@@ -66,8 +66,8 @@ final class RingsReader {
         if (closed.length > 0 && !closed[0].equals2D(closed[closed.length - 1])) {
             Coordinate last = closed[closed.length - 1];
             throw spot.fault(
-                    "a ring that begins at " + Spot.point(closed[0].x, closed[0].y) + " but ends at "
-                            + Spot.point(last.x, last.y),
+                    "a ring that begins at " + Place.shown(closed[0].x, closed[0].y) + " but ends at "
+                            + Place.shown(last.x, last.y),
                     "a closed ring, whose last vertex is the first again",
                     "Add the first vertex at the end.");
         }
@@ -82,7 +82,7 @@ final class RingsReader {
     }
 
     private static String point(Coordinate place) {
-        return Spot.point(place.x, place.y);
+        return Place.shown(place.x, place.y);
     }
 
     /** {@return a vertex as it stands in the file} */
@@ -96,16 +96,21 @@ final class RingsReader {
         }
         double x = vertex.get(0).doubleValue();
         double y = vertex.get(1).doubleValue();
-        if (!(Math.abs(x) <= FARTHEST) || !(Math.abs(y) <= FARTHEST)) {
-            throw spot.fault(Spot.point(x, y), "coordinates within ±" + FARTHEST, "Correct the coordinates.");
+        if (!(Math.abs(x) <= Place.FARTHEST) || !(Math.abs(y) <= Place.FARTHEST)) {
+            throw spot.fault(Place.shown(x, y), "coordinates within ±" + Place.FARTHEST, "Correct the coordinates.");
         }
         if (transform.isFromDegrees() && (Math.abs(x) > 180 || Math.abs(y) > 90)) {
             throw spot.fault(
-                    Spot.point(x, y) + ", which is no longitude and latitude",
+                    Place.shown(x, y) + ", which is no longitude and latitude",
                     "longitude within ±180 and latitude within ±90 degrees, in this order",
                     remedyForDegrees);
         }
         return new Coordinate(x, y);
+    }
+
+    /** {@return whether the file's coordinates are the map's} */
+    boolean keepsPlaces() {
+        return transform.isIdentity();
     }
 
     /** {@return a ring of the file in map coordinates, vertices that fall together there dropped} */
@@ -116,7 +121,7 @@ final class RingsReader {
         Coordinate[] mapped = new Coordinate[ring.length];
         for (int i = 0; i < ring.length; i++) {
             double[] place = transform.apply(ring[i].x, ring[i].y);
-            if (!(Math.abs(place[0]) <= FARTHEST) || !(Math.abs(place[1]) <= FARTHEST)) {
+            if (!(Math.abs(place[0]) <= Place.FARTHEST) || !(Math.abs(place[1]) <= Place.FARTHEST)) {
                 throw spot.fault(
                         point(ring[i]) + ", which the aquifer's CRS does not reach",
                         "places in the area that the CRS is made for",

@@ -1,7 +1,6 @@
 package org.seepledger.io.prisms;
 
 import com.fasterxml.jackson.databind.JsonNode;
-import java.math.BigDecimal;
 import org.seepledger.fault.DataFault;
 
 /**
@@ -44,16 +43,5 @@ record Spot(String file, String place) {
         }
         String text = value.toString();
         return text.length() > LONGEST ? text.substring(0, LONGEST) + "…" : text;
-    }
-
-    /** {@return a place as {@code x 500000, y 5200000.5}} */
-    static String point(double x, double y) {
-        return "x " + number(x) + ", y " + number(y);
-    }
-
-    private static String number(double value) {
-        boolean plain = value == 0 || Math.abs(value) >= 1e-6 && Math.abs(value) < 1e15;
-        String text = plain ? new BigDecimal(Double.toString(value)).toPlainString() : Double.toString(value);
-        return text.endsWith(".0") ? text.substring(0, text.length() - 2) : text;
     }
 }

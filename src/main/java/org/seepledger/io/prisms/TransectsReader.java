@@ -13,6 +13,7 @@ import org.seepledger.io.JsonFile;
 import org.seepledger.io.crs.PlanCrs;
 import org.seepledger.io.crs.PlanTransform;
 import org.seepledger.prism.Transect;
+import org.seepledger.sketch.Place;
 
 /**
  * Reads transects from a GeoJSON file of LineStrings.
@@ -67,7 +68,7 @@ public record TransectsReader(PlanCrs crs, Grid grid, Consumer<String> notes) {
             double[] onMap = transform.apply(place.x, place.y);
             if (!grid.holds(onMap[0], onMap[1])) {
                 throw vertex.fault(
-                        Spot.point(onMap[0], onMap[1]) + ", outside the grid",
+                        Place.shown(onMap[0], onMap[1]) + ", outside the grid",
                         "a place on the grid",
                         "End the line at the grid's edge.");
             }

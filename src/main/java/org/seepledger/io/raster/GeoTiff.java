@@ -12,8 +12,8 @@ import org.seepledger.aquifer.Window;
 import org.seepledger.fault.DataFault;
 
 /**
- * One GeoTIFF, open for reading from any thread. It keeps the file's structure in memory and no more than one small block of
- * its values.
+ * One GeoTIFF, open for reading from any thread. It keeps the file's structure in memory, and of its values the blocks last
+ * used, as far as a cache has room for them.
  */
 public final class GeoTiff implements Closeable {
 
@@ -28,16 +28,19 @@ public final class GeoTiff implements Closeable {
     private final Optional<Georeference> georeference;
     private int holders = 1;
 
-    private GeoTiff(TiffFile file) {
+    private GeoTiff(TiffFile file, BlockCache cache) {
         this.file = file;
         List<TiffDirectory> directories = TiffDirectory.all(file);
         TiffDirectory first = directories.get(0);
-        this.image = TiffImage.of(first);
+        this.image = TiffImage.of(first, cache);
         if (image.sample() == SampleType.BIT) {
             throw file.fault("", "1-bit samples", "values", "Write it again with gdal_translate -ot Byte.");
         }
-        this.mask =
-                directories.stream().skip(1).filter(this::isMask).findFirst().map(TiffImage::of);
+        this.mask = directories.stream()
+                .skip(1)
+                .filter(this::isMask)
+                .findFirst()
+                .map(directory -> TiffImage.of(directory, cache));
         this.noData = NoData.of(first, image.sample());
         this.scales = BandScales.of(first, bands());
         Optional<Georeference> read = ModelTransform.of(first);
@@ -53,9 +56,14 @@ public final class GeoTiff implements Closeable {
      * @throws DataFault if there is no such file, or it is no GeoTIFF that can be read here
      */
     public static GeoTiff open(Path path, String shownName) {
+        return open(path, shownName, BlockCache.ofMemory());
+    }
+
+    /** Opens a file whose unpacked blocks share a cache with those of others. */
+    static GeoTiff open(Path path, String shownName, BlockCache cache) {
         TiffFile file = TiffFile.open(path, shownName);
         try {
-            return new GeoTiff(file);
+            return new GeoTiff(file, cache);
         } catch (RuntimeException e) {
             try {
                 file.close();
@@ -241,6 +249,8 @@ public final class GeoTiff implements Closeable {
     public synchronized void close() throws IOException {
         holders--;
         if (holders == 0) {
+            image.forget();
+            mask.ifPresent(TiffImage::forget);
             file.close();
         }
     }

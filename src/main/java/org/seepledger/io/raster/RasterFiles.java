@@ -12,7 +12,7 @@ import java.util.Map;
 
 /**
  * Rasters kept open between uses, the most recently used ones, so that neither memory nor open files grow with the number of
- * rasters. For any number of threads.
+ * rasters; their unpacked blocks share one cache. For any number of threads.
  *
  * <pre>{@code
  * try (GeoTiff raster = files.open(path, "qx_l1.tif")) {
@@ -26,6 +26,7 @@ public final class RasterFiles implements Closeable {
     public static final int DEFAULT_CAPACITY = 64;
 
     private final int capacity;
+    private final BlockCache blocks = BlockCache.ofMemory();
     private final Map<Key, GeoTiff> kept = new LinkedHashMap<>(16, 0.75f, true);
 
     private record Key(Path path, String shownName) {}
@@ -55,7 +56,7 @@ public final class RasterFiles implements Closeable {
         Key key = new Key(path.toAbsolutePath().normalize(), shownName);
         GeoTiff raster = kept.get(key);
         if (raster == null) {
-            raster = GeoTiff.open(path, shownName);
+            raster = GeoTiff.open(path, shownName, blocks);
             kept.put(key, raster);
             closeEldest();
         }

@@ -9,20 +9,21 @@ import org.seepledger.fault.DataFault;
 /** One image of a TIFF file: gives stored values by band and window, rows as the file has them. */
 final class TiffImage {
 
-    /** Blocks up to this size are kept for the next cell asked for, one in each image. */
-    private static final int KEPT_BYTES = 1 << 20;
+    /** So many bytes of a block that lies plain in the file are read at once. */
+    private static final int SLICE_BYTES = 1 << 20;
 
     private final TiffFile file;
     private final Encoding encoding;
     private final BlockLayout layout;
     private final long[] offsets;
     private final long[] counts;
-    private volatile Unpacked last = new Unpacked(-1, 0, ByteBuffer.allocate(0));
+    private final BlockCache cache;
 
     /** Rows of a block from a certain one. */
-    private record Unpacked(int block, int firstRow, ByteBuffer rows) {}
+    private record Unpacked(int firstRow, ByteBuffer rows) {}
 
-    private TiffImage(TiffDirectory directory) {
+    private TiffImage(TiffDirectory directory, BlockCache cache) {
+        this.cache = cache;
         this.file = directory.file();
         this.encoding = Encoding.of(directory);
         this.layout = BlockLayout.of(directory, encoding.sample());
@@ -33,10 +34,12 @@ final class TiffImage {
     /**
      * Reads what a directory says of its image.
      *
+     * @param directory the directory
+     * @param cache keeps unpacked blocks
      * @throws DataFault if it cannot be read here or is not consistent with the file's length
      */
-    static TiffImage of(TiffDirectory directory) {
-        TiffImage image = new TiffImage(directory);
+    static TiffImage of(TiffDirectory directory, BlockCache cache) {
+        TiffImage image = new TiffImage(directory, cache);
         image.checkBlocks();
         return image;
     }
@@ -138,7 +141,7 @@ final class TiffImage {
     /** Unpacked blocks can be read in parts, which matters where one strip holds the image; others only as a whole. */
     private int rowsAtOnce(int block) {
         boolean plain = encoding.compression() == Compression.NONE;
-        return plain ? Math.max(1, KEPT_BYTES / layout.rowBytes()) : layout.rowsStored(block);
+        return plain ? Math.max(1, SLICE_BYTES / layout.rowBytes()) : layout.rowsStored(block);
     }
 
     private void copyRows(int band, int block, Window part, double[] target, int first, int stride) {
@@ -159,17 +162,14 @@ final class TiffImage {
     private Unpacked unpacked(int block, int firstRow, int rows) {
         if (encoding.compression() == Compression.NONE) {
             long position = offsets[block] + (long) firstRow * layout.rowBytes();
-            return new Unpacked(block, firstRow, file.read(position, rows * layout.rowBytes()));
+            return new Unpacked(firstRow, file.read(position, rows * layout.rowBytes()));
         }
-        Unpacked kept = last;
-        if (kept.block == block) {
-            return kept;
-        }
-        Unpacked fresh = new Unpacked(block, 0, unpack(block));
-        if (fresh.rows.capacity() <= KEPT_BYTES) {
-            last = fresh;
-        }
-        return fresh;
+        return new Unpacked(0, cache.get(this, block, () -> unpack(block)));
+    }
+
+    /** Gives back the memory of its blocks. */
+    void forget() {
+        cache.forget(this);
     }
 
     private ByteBuffer unpack(int block) {

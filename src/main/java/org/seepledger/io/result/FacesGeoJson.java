@@ -8,6 +8,8 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
+import org.seepledger.io.crs.CrsMember;
+import org.seepledger.io.prisms.PolygonsJson;
 import org.seepledger.ledger.Account;
 import org.seepledger.ledger.Disclaimer;
 import org.seepledger.ledger.Entry;
@@ -15,7 +17,6 @@ import org.seepledger.ledger.Group;
 import org.seepledger.ledger.PeriodBudget;
 import org.seepledger.prism.Prism;
 import org.seepledger.prism.Ring;
-import org.seepledger.prism.Side;
 
 /**
  * Writes {@code faces.geojson}: the faces of prisms with the flow through them, mean over the record; a side, or a
@@ -49,9 +50,7 @@ public final class FacesGeoJson {
             json.useDefaultPrettyPrinter();
             json.writeStartObject();
             json.writeStringField("type", "FeatureCollection");
-            if (crs.isPresent()) {
-                writeCrs(json, crs.get());
-            }
+            CrsMember.write(json, crs);
             json.writeStringField("disclaimer", Disclaimer.text());
             json.writeArrayFieldStart("features");
             FacesGeoJson faces = new FacesGeoJson(json, units);
@@ -61,15 +60,6 @@ public final class FacesGeoJson {
             json.writeEndArray();
             json.writeEndObject();
         }
-    }
-
-    private static void writeCrs(JsonGenerator json, String name) throws IOException {
-        json.writeObjectFieldStart("crs");
-        json.writeStringField("type", "name");
-        json.writeObjectFieldStart("properties");
-        json.writeStringField("name", name.replaceFirst("^EPSG:", "urn:ogc:def:crs:EPSG::"));
-        json.writeEndObject();
-        json.writeEndObject();
     }
 
     private void write(Prism prism, PeriodBudget record) throws IOException {
@@ -83,7 +73,7 @@ public final class FacesGeoJson {
                 if (group == Group.SIDE) {
                     writeLines(prism, entry.account().item());
                 } else {
-                    writePolygons(prism);
+                    PolygonsJson.write(json, prism.parts(), true);
                 }
                 json.writeEndObject();
                 json.writeEndObject();
@@ -122,41 +112,12 @@ public final class FacesGeoJson {
             for (int i = 0; i < ring.sides().size(); i++) {
                 if (ring.sides().get(i).item().equals(item)) {
                     json.writeStartArray();
-                    writePlace(ring.sides().get(i));
-                    writePlace(ring.after(i));
+                    PolygonsJson.writeStart(json, ring.sides().get(i));
+                    PolygonsJson.writeStart(json, ring.after(i));
                     json.writeEndArray();
                 }
             }
         }
-        json.writeEndArray();
-    }
-
-    private void writePolygons(Prism prism) throws IOException {
-        json.writeStringField("type", "MultiPolygon");
-        json.writeArrayFieldStart("coordinates");
-        for (List<Ring> part : prism.parts()) {
-            json.writeStartArray();
-            for (Ring ring : part) {
-                writeRing(ring);
-            }
-            json.writeEndArray();
-        }
-        json.writeEndArray();
-    }
-
-    private void writeRing(Ring ring) throws IOException {
-        json.writeStartArray();
-        for (Side side : ring.sides()) {
-            writePlace(side);
-        }
-        writePlace(ring.sides().get(0));
-        json.writeEndArray();
-    }
-
-    private void writePlace(Side start) throws IOException {
-        json.writeStartArray();
-        json.writeNumber(start.x());
-        json.writeNumber(start.y());
         json.writeEndArray();
     }
 }

@@ -10,6 +10,7 @@ import static j2html.TagCreator.h2;
 import static j2html.TagCreator.h3;
 import static j2html.TagCreator.p;
 import static j2html.TagCreator.section;
+import static j2html.TagCreator.text;
 
 import j2html.tags.DomContent;
 import java.util.ArrayList;
@@ -26,6 +27,7 @@ final class AnswerSection {
         return section(
                         h2("The answer"),
                         p("Rates are means over the whole record, " + report.span(report.record()) + "."),
+                        report.results().size() > 1 ? TotalsTable.ofPrisms(report) : text(""),
                         each(report.results(), result -> of(report, result)))
                 .withId("answer");
     }

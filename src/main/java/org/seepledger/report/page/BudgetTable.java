@@ -1,6 +1,5 @@
 package org.seepledger.report.page;
 
-import static j2html.TagCreator.caption;
 import static j2html.TagCreator.details;
 import static j2html.TagCreator.div;
 import static j2html.TagCreator.each;
@@ -51,7 +50,7 @@ final class BudgetTable {
 
     private DomContent write() {
         List<Term> folded = folded();
-        String title = prism + ": " + budget.period().name() + ", " + amounts();
+        String title = prism + ": " + budget.period().name() + ", " + report.amountsAndUnit();
         List<DomContent> bodies = new ArrayList<>();
         for (Group group : List.of(Group.SIDE, Group.LID, Group.SOURCE, Group.STORAGE)) {
             List<Term> terms = Term.of(budget).stream()
@@ -65,19 +64,15 @@ final class BudgetTable {
         return div(Cells.scrolling(title, framed(title, bodies)), folded.isEmpty() ? text("") : fold(folded));
     }
 
-    private String amounts() {
-        return (report.amounts() == Amounts.RATE ? "mean rates in " : "volumes in ") + report.amountUnit();
-    }
-
     private TableTag framed(String title, List<DomContent> bodies) {
         return table(
-                        caption(title),
+                        Cells.caption(title),
                         thead(tr(
                                 Cells.column("Item"),
                                 Cells.numberColumn("In"),
                                 Cells.numberColumn("Out"),
                                 Cells.numberColumn("Net"),
-                                Cells.numberColumn("Net of throughput"))),
+                                Cells.numberColumn("Of throughput"))),
                         each(bodies.stream()))
                 .withClass("budget")
                 .withData("prism", prism)
@@ -134,7 +129,7 @@ final class BudgetTable {
     }
 
     private DomContent fold(List<Term> folded) {
-        String title = prism + ": " + budget.period().name() + ", the smaller sides, " + amounts();
+        String title = prism + ": " + budget.period().name() + ", the smaller sides, " + report.amountsAndUnit();
         DomContent body =
                 tbody(folded.stream().flatMap(term -> rows.of(term).stream()).toArray(DomContent[]::new));
         return details(

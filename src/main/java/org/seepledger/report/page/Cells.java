@@ -5,13 +5,13 @@ import static j2html.TagCreator.div;
 import static j2html.TagCreator.span;
 import static j2html.TagCreator.td;
 import static j2html.TagCreator.th;
-import static j2html.TagCreator.tr;
 
+import j2html.TagCreator;
 import j2html.tags.DomContent;
+import j2html.tags.specialized.CaptionTag;
 import j2html.tags.specialized.TableTag;
 import j2html.tags.specialized.TdTag;
 import j2html.tags.specialized.ThTag;
-import j2html.tags.specialized.TrTag;
 import java.util.function.DoubleFunction;
 import org.seepledger.unit.Figures;
 
@@ -22,7 +22,7 @@ final class Cells {
 
     /** A number to four digits, with all its digits beside it; a dash where it cannot be given. */
     static TdTag number(double value) {
-        return number(value, Figures::typeset);
+        return number(value, Figures::tabular);
     }
 
     /** A percentage, in the same way. */
@@ -48,6 +48,11 @@ final class Cells {
         return td(content).withClass("num");
     }
 
+    /** A table's caption, which stays in sight where the table scrolls. */
+    static CaptionTag caption(String words) {
+        return TagCreator.caption(span(words));
+    }
+
     static ThTag column(String name) {
         return th(name).attr("scope", "col");
     }
@@ -58,10 +63,6 @@ final class Cells {
 
     static ThTag row(String name) {
         return th(name).attr("scope", "row");
-    }
-
-    static TrTag head(DomContent... columns) {
-        return tr(columns);
     }
 
     /** A table in a box of its own, which scrolls where the page is narrower; named so that a keyboard can reach it. */

@@ -1,6 +1,6 @@
 package org.seepledger.report.page;
 
-import static j2html.TagCreator.caption;
+import static j2html.TagCreator.div;
 import static j2html.TagCreator.each;
 import static j2html.TagCreator.h3;
 import static j2html.TagCreator.li;
@@ -68,7 +68,7 @@ final class ClosureSection {
         return Cells.scrolling(
                 title,
                 table(
-                                caption(title),
+                                Cells.caption(title),
                                 thead(tr(
                                         Cells.column("Layer"),
                                         Cells.numberColumn("Row"),
@@ -102,7 +102,7 @@ final class ClosureSection {
     }
 
     private DomContent leads() {
-        return section(
+        return div(
                 p(
                         "What the program knows of this set that can leave a residual. These are leads to follow, not findings:"),
                 ul(each(ClosureLeads.of(report.aquifer(), result), lead -> li(lead))));

@@ -1,6 +1,5 @@
 package org.seepledger.report.page;
 
-import static j2html.TagCreator.caption;
 import static j2html.TagCreator.each;
 import static j2html.TagCreator.h2;
 import static j2html.TagCreator.p;
@@ -35,8 +34,7 @@ final class ExchangeSection {
     }
 
     private static DomContent flows(Report report) {
-        String title = "Exchange: record, " + (report.amounts() == Amounts.RATE ? "mean rates in " : "volumes in ")
-                + report.amountUnit();
+        String title = "Exchange: record, " + report.amountsAndUnit();
         List<ExchangeFlow> flows = report.exchange().stream()
                 .filter(flow -> flow.volume(report.record()) != 0)
                 .toList();
@@ -45,7 +43,7 @@ final class ExchangeSection {
                 : Cells.scrolling(
                         title,
                         table(
-                                        caption(title),
+                                        Cells.caption(title),
                                         thead(tr(Cells.column("From"), Cells.column("To"), Cells.numberColumn("Flow"))),
                                         tbody(each(flows, flow -> row(report, flow))))
                                 .withClass("exchange"));

@@ -1,6 +1,5 @@
 package org.seepledger.report.page;
 
-import static j2html.TagCreator.caption;
 import static j2html.TagCreator.code;
 import static j2html.TagCreator.details;
 import static j2html.TagCreator.each;
@@ -33,7 +32,7 @@ final class InputsSection {
         DomContent files = Cells.scrolling(
                 title,
                 table(
-                                caption(title),
+                                Cells.caption(title),
                                 thead(tr(Cells.column("File"), Cells.numberColumn("Bytes"), Cells.column("SHA-256"))),
                                 tbody(each(inputs, InputsSection::row)))
                         .withClass("files"));
@@ -64,7 +63,7 @@ final class InputsSection {
                         Cells.scrolling(
                                 title,
                                 table(
-                                        caption(title),
+                                        Cells.caption(title),
                                         thead(tr(
                                                 Cells.column("Term"),
                                                 Cells.column("Origin"),

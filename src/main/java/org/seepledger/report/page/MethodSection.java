@@ -23,8 +23,8 @@ final class MethodSection {
         return section(
                         h2("Method and conventions"),
                         p("Flow was given as " + report.aquifer().flow().given() + "."),
-                        p(Statement.METHOD),
-                        p(Statement.SIGNS),
+                        p(typeset(Statement.METHOD)),
+                        p(typeset(Statement.SIGNS)),
                         p(
                                 "Throughput is the larger of all gains and all losses, gross, storage among them. The net closure"
                                         + " error sets the residual against the larger sum of the items' net gains or net losses,"
@@ -40,5 +40,13 @@ final class MethodSection {
                         dl(each(report.options(), (name, value) -> div(dt(code(name)), dd(code(value)))))
                                 .withClass("facts options"))
                 .withId("method");
+    }
+
+    /** The same words with the signs that a page has and a table of plain letters has not. */
+    private static String typeset(String plain) {
+        return plain.replace(" - ", " − ")
+                .replace(" x ", " × ")
+                .replace(" / ", " ÷ ")
+                .replace("Raviart-Thomas", "Raviart–Thomas");
     }
 }

@@ -19,9 +19,4 @@ public record PrismPictures(
         Optional<Picture> blocks,
         Optional<Picture> series,
         Optional<Picture> storage,
-        Optional<Picture> imbalance) {
-
-    /** No pictures. */
-    public static final PrismPictures NONE = new PrismPictures(
-            Optional.empty(), Optional.empty(), Optional.empty(), Optional.empty(), Optional.empty(), Optional.empty());
-}
+        Optional<Picture> imbalance) {}

@@ -58,9 +58,10 @@ final class PrismSection {
         List<PeriodBudget> budgets = report.tables().of(result);
         return section(
                 h3("Budget"),
-                p("In and out are gross and never negative; net is in less out. Rows of a layer add up to their item,"
-                        + " items to their group. Items without any flow are not shown by layer."
-                        + " A dash is a number that cannot be given."),
+                p(
+                        "In and out are gross and never negative; net is in less out, and beside it its share of throughput. Rows of a layer add up to their item,"
+                                + " items to their group. Items without any flow are not shown by layer."
+                                + " A dash is a number that cannot be given."),
                 each(budgets, budget -> BudgetTable.of(report, result.prism(), budget)));
     }
 }

@@ -76,9 +76,10 @@ public record Report(
         return amounts.of(volume, period, units);
     }
 
-    /** The unit of what the tables give. */
-    String amountUnit() {
-        return wording().unit(amounts.unit(units));
+    /** What the tables give, and its unit. */
+    String amountsAndUnit() {
+        return (amounts == Amounts.RATE ? "mean rates in " : "volumes in ")
+                + wording().unit(amounts.unit(units));
     }
 
     /** A stretch of time as dates, where there are any, else as times. */

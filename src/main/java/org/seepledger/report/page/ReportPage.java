@@ -25,7 +25,6 @@ import java.nio.charset.StandardCharsets;
 import java.util.stream.IntStream;
 import org.seepledger.ledger.Disclaimer;
 import org.seepledger.report.InkStyle;
-import org.seepledger.report.SvgWriter;
 
 /** Writes a report as one HTML page (the HTML standard of WHATWG) that needs nothing but itself. */
 public final class ReportPage {
@@ -42,7 +41,6 @@ public final class ReportPage {
                         head(report),
                         body(
                                 a("Skip to the answer").withHref("#answer").withClass("skip"),
-                                rawHtml(SvgWriter.textures()),
                                 TitleBlock.of(report),
                                 aside(disclaimer()).withClass("disclaimer").attr("aria-label", "Disclaimer"),
                                 TitleBlock.contents(report),

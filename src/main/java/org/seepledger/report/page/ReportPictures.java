@@ -7,7 +7,6 @@ import java.util.OptionalInt;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.GriddedValues;
-import org.seepledger.aquifer.PlacedWell;
 import org.seepledger.aquifer.StorageKnowledge;
 import org.seepledger.aquifer.Window;
 import org.seepledger.balance.Balance;
@@ -43,7 +42,6 @@ public final class ReportPictures {
 
     private final Aquifer aquifer;
     private final List<Prism> prisms;
-    private final List<PlacedWell> wells;
     private final Balance balance;
     private final UnitShown rate;
     private final UnitShown volume;
@@ -61,7 +59,6 @@ public final class ReportPictures {
         Wording wording = Wording.typeset(units);
         this.aquifer = aquifer;
         this.prisms = List.copyOf(prisms);
-        this.wells = aquifer.placedWells();
         this.balance = balance;
         this.rate = new UnitShown(wording.unit(units.rate()), units.rateFactor(), true);
         this.volume = new UnitShown(wording.unit(units.volume()), units.volumeFactor(), false);
@@ -117,7 +114,8 @@ public final class ReportPictures {
     private Picture map(Prism prism, Optional<SectionLine> line, PrismResult result) {
         List<Prism> others = new ArrayList<>(prisms);
         others.remove(prism);
-        return MapPicture.ofFaces(prism, others, wells, Optional.of(ground(prism)), line, result.record(), rate, WIDTH);
+        return MapPicture.ofFaces(
+                aquifer, prism, others, Optional.of(ground(prism)), line, result.record(), rate, WIDTH);
     }
 
     /** The head in the range's first layer at the record's end or, where none is known, that layer's top. */
@@ -143,7 +141,7 @@ public final class ReportPictures {
         Ground ground = new Ground(drape, ValueScale.aboutZero(drape.values()), title, rate.words(), false);
         List<HotSpot> inLayer =
                 spots.stream().filter(spot -> spot.layer() == layer).toList();
-        return MapPicture.ofImbalance(prism, ground, inLayer, WIDTH);
+        return MapPicture.ofImbalance(aquifer, prism, ground, inLayer, WIDTH);
     }
 
     private double[] scaled(double[] row) {

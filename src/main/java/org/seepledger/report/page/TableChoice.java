@@ -1,8 +1,8 @@
 package org.seepledger.report.page;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Set;
-import java.util.stream.Stream;
 import org.seepledger.ledger.PeriodBudget;
 import org.seepledger.report.PrismResult;
 
@@ -21,12 +21,17 @@ public record TableChoice(boolean record, boolean worst, boolean all, Set<String
         names = Set.copyOf(names);
     }
 
-    /** The chosen budgets of a prism: the record first, then periods in their order. */
+    /**
+     * The chosen budgets of a prism: the record first, then periods in their order; the record where the choice comes to
+     * nothing, as the worst period does where there is but one.
+     */
     List<PeriodBudget> of(PrismResult result) {
-        return Stream.concat(
-                        record ? Stream.of(result.record()) : Stream.empty(),
-                        result.periods().stream().filter(budget -> isChosen(budget, result)))
-                .toList();
+        List<PeriodBudget> chosen = new ArrayList<>(result.periods());
+        chosen.removeIf(budget -> !isChosen(budget, result));
+        if (record || chosen.isEmpty()) {
+            chosen.add(0, result.record());
+        }
+        return chosen;
     }
 
     private boolean isChosen(PeriodBudget budget, PrismResult result) {

@@ -95,7 +95,7 @@ class SolutesReaderTest {
     void saysWhereAConcentrationCannotBe() {
         assertThatThrownBy(() -> read("", "1,1,1,2", "1,2,1,-2"))
                 .isInstanceOf(DataFault.class)
-                .hasMessageContaining("solutes[0].concentration, layer 1, row 1, column 2: found -2.0");
+                .hasMessageContaining("solutes, entry 1, concentration, layer 1, row 1, column 2: found -2.0");
         assertThatThrownBy(() -> read("", "1,1,1,<x"))
                 .hasMessageContaining("line 2")
                 .hasMessageContaining("after <");

@@ -36,7 +36,7 @@ class PrismsReaderFaultsTest {
 
     private static void read(Path file, PlanCrs crs, boolean clip) {
         SurfaceReader none = (raster, shown) -> GriddedValues.constant(0);
-        new PrismsReader(crs, GRID, 4, clip, none, note -> {}).read(file, "p.geojson");
+        new PrismsReader(crs, GRID, 4, clip, none, warning -> {}, note -> {}).read(file, "p.geojson");
     }
 
     private AbstractThrowableAssert<?, ? extends Throwable> assertRefused(String text, PlanCrs crs, boolean clip)
@@ -269,7 +269,15 @@ class PrismsReaderFaultsTest {
                         + " within the grid, or cut it at the grid's edge with --clip.");
         String away = collection(feature("\"name\": \"A\"", "Polygon", "[[[160,20],[240,20],[240,60],[160,20]]]"));
         assertRefused(away).hasMessageContaining("found a polygon that lies outside the grid");
-        assertRefused(away, PlanCrs.local(), true).hasMessageContaining("Check the coordinates and the CRS of both.");
+        assertRefused(away, PlanCrs.local(), true)
+                .hasMessageContaining("the aquifer's crs is null, so that both must be in the same local ones.");
+        String degrees =
+                collection(feature("\"name\": \"A\"", "Polygon", "[[[115,46],[115.1,46],[115.1,46.2],[115,46]]]"));
+        assertRefused(degrees)
+                .hasMessageContaining("They look like longitude and latitude, but the aquifer's crs is null")
+                .hasMessageContaining("name the aquifer's crs in aquifer.json");
+        assertRefused(away, PlanCrs.of("EPSG:32633", "aquifer.json", "crs"), false)
+                .hasMessageContaining("no longitude and latitude");
     }
 
     @Test

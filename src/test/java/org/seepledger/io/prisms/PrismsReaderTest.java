@@ -11,6 +11,8 @@ import java.util.List;
 import java.util.stream.Collectors;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import org.seepledger.aquifer.Axis;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.GriddedValues;
@@ -32,12 +34,13 @@ class PrismsReaderTest {
     @TempDir
     Path folder;
 
+    private final List<String> warnings = new ArrayList<>();
     private final List<String> notes = new ArrayList<>();
 
     private List<Prism> read(String text, PlanCrs crs, Grid grid, boolean clip) throws IOException {
         Path file = Files.writeString(folder.resolve("prisms.geojson"), text);
         SurfaceReader surfaces = (raster, shown) -> GriddedValues.constant(shown.length());
-        return new PrismsReader(crs, grid, 4, clip, surfaces, notes::add).read(file, "prisms.geojson");
+        return new PrismsReader(crs, grid, 4, clip, surfaces, warnings::add, notes::add).read(file, "prisms.geojson");
     }
 
     private Prism local(String properties, String type, String coordinates) throws IOException {
@@ -261,12 +264,33 @@ class PrismsReaderTest {
         String other = feature("\"name\": \"B\", \"layer\": 2", "Polygon", "[[[60,60],[70,60],[70,70],[60,60]]]");
         String properties = "\"name\": \"A\", \"layer\": 1, \"Layers\": [1, 2], \"boundary\": 0, \"colour\": \"red\"";
         read(collection(feature(properties, "Polygon", "[" + SQUARE + "]"), other), PlanCrs.local(), LOCAL, false);
-        assertThat(notes).hasSize(3);
-        assertThat(notes.get(0))
-                .isEqualTo("prisms.geojson, feature 1: the property \"layer\" is not one of name, layers, top, bottom,"
-                        + " boundaries and was not read");
-        assertThat(notes.get(1)).contains("\"Layers\"");
-        assertThat(notes.get(2)).contains("\"boundary\"");
+        assertThat(warnings)
+                .containsExactly(
+                        "prisms.geojson, feature 1: the property \"layer\" is not one of name, layers, top, bottom,"
+                                + " boundaries and was not read, so that the prism has no \"layers\": did you mean that?",
+                        "prisms.geojson, feature 1: the property \"Layers\" is not one of name, layers, top, bottom,"
+                                + " boundaries and was not read, so that the prism has no \"layers\": did you mean that?",
+                        "prisms.geojson, feature 1: the property \"boundary\" is not one of name, layers, top, bottom,"
+                                + " boundaries and was not read, so that the prism has no \"boundaries\": did you mean that?");
+        assertThat(notes).isEmpty();
+    }
+
+    /** A GIS may have a column of its own beside the right one; a name is there in any case. */
+    @Test
+    void onlyNotesAResemblanceToAPropertyThatIsThere() throws IOException {
+        local(
+                "\"name\": \"A\", \"Name\": \"a\", \"layers\": [1, 2], \"layer\": \"parcels\"",
+                "Polygon",
+                "[" + SQUARE + "]");
+        assertThat(warnings).isEmpty();
+        assertThat(notes).hasSize(2).allSatisfy(note -> assertThat(note).endsWith("and was not read"));
+    }
+
+    @ParameterizedTest
+    @CsvSource({"Top, top", "botom, bottom", "bottoms, bottom", "LAYERS, layers", "layer_no, layers"})
+    void warnsOfAPropertyThatIsNearlyARange(String written, String meant) throws IOException {
+        local("\"name\": \"A\", \"" + written + "\": 3", "Polygon", "[" + SQUARE + "]");
+        assertThat(warnings).singleElement().asString().endsWith("has no \"" + meant + "\": did you mean that?");
     }
 
     @Test

@@ -1,0 +1,162 @@
+package org.seepledger.desktop;
+
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Optional;
+import javafx.scene.Scene;
+import org.seepledger.aquifer.Aquifer;
+import org.seepledger.desktop.action.Action;
+import org.seepledger.desktop.action.Actions;
+import org.seepledger.desktop.draw.DraftActions;
+import org.seepledger.desktop.draw.DraftFiles;
+import org.seepledger.desktop.draw.DraftHand;
+import org.seepledger.desktop.draw.DraftModel;
+import org.seepledger.desktop.draw.Tray;
+import org.seepledger.desktop.folio.Folio;
+import org.seepledger.desktop.map.MapModel;
+import org.seepledger.desktop.map.MapView;
+import org.seepledger.desktop.map.ShowingBar;
+import org.seepledger.desktop.port.CopyBoard;
+import org.seepledger.desktop.port.FileDialogs;
+import org.seepledger.desktop.port.Questions;
+import org.seepledger.desktop.port.RecentFolders;
+import org.seepledger.desktop.session.OpenSet;
+import org.seepledger.desktop.session.Opening;
+import org.seepledger.desktop.session.Session;
+import org.seepledger.desktop.shell.ShellModel;
+import org.seepledger.desktop.shell.ShellView;
+import org.seepledger.desktop.shell.Slots;
+import org.seepledger.desktop.task.Tasks;
+import org.seepledger.desktop.theme.Dress;
+import org.seepledger.desktop.welcome.WelcomeModel;
+import org.seepledger.desktop.welcome.WelcomeView;
+import org.seepledger.desktop.words.Words;
+
+/** Puts the window together. */
+final class Assembly {
+
+    private final Outside outside;
+    private final Session session = new Session();
+    private final ShellModel shell = new ShellModel(session);
+    private final WelcomeModel welcome;
+    private final MapModel map;
+    private final DraftModel draft;
+    private final DraftHand hand;
+    private final DraftFiles files;
+    private final Tray tray;
+    private final MapView mapView;
+    private final ShellView view;
+    private final Scene scene;
+
+    /** What the window asks of the machine. */
+    record Outside(Tasks tasks, FileDialogs dialogs, Questions questions, CopyBoard copies, RecentFolders folders) {}
+
+    Assembly(Outside outside, List<Path> samplePlaces) {
+        this.outside = outside;
+        this.map = new MapModel(session, outside.tasks());
+        this.welcome = new WelcomeModel(
+                outside.tasks(), outside.dialogs(), outside.folders(), this::show, go -> files().whenSafe(go));
+        Actions actions = new Actions();
+        this.draft = new DraftModel(session);
+        this.hand = new DraftHand(draft);
+        this.files = new DraftFiles(draft, outside.tasks(), outside.dialogs(), outside.questions());
+        this.tray = new Tray(draft, hand);
+        this.mapView = new MapView(map, outside.tasks(), shell.theme(), hand, tray);
+        draft.version().addListener((version, before, after) -> mapView.repaint());
+        draft.tool().addListener((tool, before, after) -> mapView.repaint());
+        Folio folio = new Folio(session, outside.tasks(), outside.copies(), shell.theme());
+        Slots slots = new Slots(
+                new WelcomeView(welcome),
+                new ShowingBar(map),
+                mapView,
+                Optional.of(folio.pages()),
+                Optional.of(folio.ribbon()));
+        this.view = new ShellView(shell, slots, actions);
+        actions.add(actionsOfWindow());
+        actions.add(mapView.actions());
+        actions.add(new DraftActions(draft, hand, files, tray, mapView::repaint).all(map));
+        actions.add(folio.actions());
+        this.scene = new Scene(view, 1280, 800);
+        Dress.put(scene, shell.theme());
+        welcome.look(samplePlaces);
+    }
+
+    private List<Action> actionsOfWindow() {
+        String window = "actions.group.window";
+        String time = "actions.group.time";
+        return List.of(
+                new Action(window, "action.list", "F1", view::showActions),
+                new Action(window, "action.open", "Shortcut+O", welcome::choose),
+                new Action(window, "action.welcome", "Shortcut+Home", shell::turnPage),
+                new Action(window, "action.theme", "F9", shell::switchTheme),
+                new Action(window, "action.pane", "F6", view::nextPane),
+                new Action(window, "action.caution", "Shift+F1", view::showCaution),
+                new Action(time, "action.later", "Period", () -> shell.move(1)),
+                new Action(time, "action.earlier", "Comma", () -> shell.move(-1)),
+                new Action(time, "action.deeper", "Page Down", () -> shell.sink(1)),
+                new Action(time, "action.higher", "Page Up", () -> shell.sink(-1)));
+    }
+
+    private void show(Opening opening) {
+        Optional<OpenSet> before = session.set().get();
+        session.show(Optional.of(opening.set()));
+        session.status().set(opened(opening.set().aquifer()));
+        files.begin(opening);
+        mapView.focus();
+        before.ifPresent(this::putAway);
+    }
+
+    private void putAway(OpenSet set) {
+        outside.tasks()
+                .each("closing", 1)
+                .run(
+                        progress -> {
+                            set.close();
+                            return set;
+                        },
+                        closed -> {},
+                        fault -> {});
+    }
+
+    private static String opened(Aquifer aquifer) {
+        return Words.of(
+                "opened",
+                aquifer.name(),
+                aquifer.grid().rows(),
+                aquifer.grid().columns(),
+                aquifer.layers().size(),
+                aquifer.times().intervals());
+    }
+
+    Scene scene() {
+        return scene;
+    }
+
+    Session session() {
+        return session;
+    }
+
+    ShellModel shell() {
+        return shell;
+    }
+
+    DraftFiles files() {
+        return files;
+    }
+
+    Tray tray() {
+        return tray;
+    }
+
+    DraftModel draft() {
+        return draft;
+    }
+
+    MapModel map() {
+        return map;
+    }
+
+    WelcomeModel welcome() {
+        return welcome;
+    }
+}

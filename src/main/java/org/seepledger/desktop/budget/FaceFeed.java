@@ -1,0 +1,70 @@
+package org.seepledger.desktop.budget;
+
+import java.util.LinkedHashMap;
+import java.util.Map;
+import java.util.Optional;
+import org.seepledger.balance.Periods;
+import org.seepledger.desktop.session.Drawing;
+import org.seepledger.desktop.session.FaceFlows;
+import org.seepledger.desktop.session.OpenSet;
+import org.seepledger.desktop.session.Session;
+import org.seepledger.io.result.ResultUnits;
+import org.seepledger.ledger.Group;
+import org.seepledger.ledger.Period;
+import org.seepledger.prism.Prism;
+import org.seepledger.report.Term;
+
+/** Tells the map what flows through the selected prism's sides in the interval looked at. */
+public final class FaceFeed {
+
+    private final Session session;
+    private final LiveBudget live;
+    private final Reading reading;
+
+    /**
+     * Prepares to tell.
+     *
+     * @param session what the window looks at
+     * @param live the budgets
+     * @param reading the units
+     */
+    public FaceFeed(Session session, LiveBudget live, Reading reading) {
+        this.session = session;
+        this.live = live;
+        this.reading = reading;
+    }
+
+    /** Begins to tell. */
+    public void begin() {
+        live.known().addListener((known, before, after) -> tell());
+        session.selected().addListener((selected, before, after) -> tell());
+        session.interval().addListener((interval, before, after) -> tell());
+        reading.rateUnit().addListener((unit, before, after) -> tell());
+    }
+
+    private void tell() {
+        Optional<OpenSet> set = session.set().get();
+        Optional<Prism> prism = session.selectedPrism();
+        session.faceFlows()
+                .set(set.flatMap(open -> prism.flatMap(drawn -> flows(open, drawn)))
+                        .orElse(FaceFlows.NONE));
+    }
+
+    private Optional<FaceFlows> flows(OpenSet set, Prism prism) {
+        Period interval = set.workbench()
+                .periods(Periods.Every.INTERVAL, 1)
+                .get(session.interval().get());
+        Drawing drawing = session.drawing().get();
+        return live.known().get().budget(prism, interval).map(shown -> {
+            ResultUnits units = reading.inUse(set);
+            Map<String, Double> net = new LinkedHashMap<>();
+            for (Term term : Term.of(shown.budget())) {
+                if (term.group() == Group.SIDE) {
+                    net.put(term.item(), term.net() / interval.duration() * units.rateFactor());
+                }
+            }
+            long revision = shown.prism().equals(prism) ? drawing.revision() : FaceFlows.NONE.revision();
+            return new FaceFlows(revision, prism.name(), units.rate().toString(), net);
+        });
+    }
+}

@@ -1,0 +1,39 @@
+package org.seepledger.desktop.budget;
+
+import java.time.LocalDateTime;
+import java.time.format.DateTimeFormatter;
+import org.seepledger.aquifer.Times;
+import org.seepledger.desktop.words.Words;
+import org.seepledger.ledger.Period;
+import org.seepledger.unit.Figures;
+
+/** Periods in words. */
+public final class PeriodWords {
+
+    private static final DateTimeFormatter MINUTE = DateTimeFormatter.ofPattern("yyyy-MM-dd HH:mm");
+
+    private PeriodWords() {}
+
+    /**
+     * {@return a period with its begin and end: as dates where there are dates, else as times}
+     *
+     * @param period the period
+     * @param times the record's instants
+     */
+    public static String of(Period period, Times times) {
+        return times.hasDates()
+                ? Words.of("period.dates", period.name(), date(times, period.from()), date(times, period.to()))
+                : Words.of(
+                        "period.times",
+                        period.name(),
+                        Figures.typeset(period.from()),
+                        Figures.typeset(period.to()),
+                        times.unit());
+    }
+
+    /** A day; where it is not midnight, with the time of day. */
+    private static String date(Times times, double time) {
+        LocalDateTime date = times.date(time).orElseThrow();
+        return date.toLocalTime().toSecondOfDay() == 0 ? date.toLocalDate().toString() : MINUTE.format(date);
+    }
+}

@@ -1,0 +1,169 @@
+package org.seepledger.desktop.chart;
+
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalInt;
+import javafx.beans.property.ReadOnlyIntegerProperty;
+import javafx.beans.property.ReadOnlyIntegerWrapper;
+import javafx.beans.property.ReadOnlyLongProperty;
+import javafx.beans.property.ReadOnlyLongWrapper;
+import javafx.beans.property.ReadOnlyObjectProperty;
+import javafx.beans.property.ReadOnlyStringProperty;
+import javafx.beans.property.ReadOnlyStringWrapper;
+import org.seepledger.balance.Periods;
+import org.seepledger.desktop.budget.LiveBudget;
+import org.seepledger.desktop.budget.PeriodWords;
+import org.seepledger.desktop.budget.Reading;
+import org.seepledger.desktop.session.OpenSet;
+import org.seepledger.desktop.session.Session;
+import org.seepledger.desktop.task.PaneState;
+import org.seepledger.job.RecordBudget;
+import org.seepledger.ledger.Ledger;
+import org.seepledger.ledger.Period;
+import org.seepledger.picture.BudgetSeries;
+
+/** The selected prism's budgets through time, and the interval looked at among them. */
+public final class ChartModel {
+
+    private final Session session;
+    private final LiveBudget live;
+    private final Reading reading;
+    private final ReadOnlyLongWrapper changes = new ReadOnlyLongWrapper();
+    private final ReadOnlyIntegerWrapper last = new ReadOnlyIntegerWrapper();
+    private final ReadOnlyStringWrapper when = new ReadOnlyStringWrapper("");
+
+    /**
+     * Makes the model.
+     *
+     * @param session what the window looks at
+     * @param live the budgets
+     * @param reading how figures are read
+     */
+    public ChartModel(Session session, LiveBudget live, Reading reading) {
+        this.session = session;
+        this.live = live;
+        this.reading = reading;
+        session.set().addListener((set, before, after) -> change());
+        live.whole().addListener((whole, before, after) -> change());
+        session.selected().addListener((selected, before, after) -> change());
+        session.interval().addListener((interval, before, after) -> change());
+        reading.changes().addListener((changed, before, after) -> change());
+        change();
+    }
+
+    /** {@return how often what it shows has changed} */
+    public ReadOnlyLongProperty changes() {
+        return changes.getReadOnlyProperty();
+    }
+
+    /** {@return the last interval, from 0} */
+    public ReadOnlyIntegerProperty last() {
+        return last.getReadOnlyProperty();
+    }
+
+    /** {@return the interval looked at in words} */
+    public ReadOnlyStringProperty when() {
+        return when.getReadOnlyProperty();
+    }
+
+    /** Asks the map to begin a prism. */
+    public void draw() {
+        live.draw();
+    }
+
+    /** {@return which state the pane is in} */
+    public ReadOnlyObjectProperty<PaneState> state() {
+        return live.record();
+    }
+
+    /** {@return the interval looked at, from 0} */
+    public ReadOnlyIntegerProperty interval() {
+        return session.interval();
+    }
+
+    /**
+     * Looks at an interval.
+     *
+     * @param interval the interval; the nearest there is
+     */
+    public void look(int interval) {
+        session.interval().set(Math.max(0, Math.min(last.get(), interval)));
+    }
+
+    /**
+     * Looks at the first interval of a period of the chart.
+     *
+     * @param period the period, from 0
+     */
+    public void lookAtPeriod(int period) {
+        session.set().get().ifPresent(set -> {
+            List<Period.Part> parts = periods(set).get(period).parts();
+            boolean within = parts.stream()
+                    .anyMatch(part -> part.interval() == session.interval().get());
+            if (!within) {
+                look(parts.get(0).interval());
+            }
+        });
+    }
+
+    /**
+     * {@return the chart, if the record is known}
+     *
+     * @param width in logical pixels
+     * @param height in logical pixels
+     */
+    public Optional<BudgetSeries> chart(double width, double height) {
+        return session.set()
+                .get()
+                .flatMap(set -> ledger().map(ledger -> {
+                    List<Period> periods = periods(set);
+                    return BudgetSeries.of(
+                            ledger.prism(),
+                            periods.stream().map(ledger::budget).toList(),
+                            set.aquifer().times(),
+                            reading.shown(set),
+                            marked(periods),
+                            Math.max(300, width),
+                            height);
+                }));
+    }
+
+    private Optional<Ledger> ledger() {
+        return live.whole()
+                .get()
+                .map(RecordBudget::balance)
+                .flatMap(balance -> balance.ledgers().stream()
+                        .filter(ledger ->
+                                ledger.prism().equals(session.selected().get()))
+                        .findFirst());
+    }
+
+    /** One bar for the whole record would show nothing through time: intervals then. */
+    private List<Period> periods(OpenSet set) {
+        return reading.every().get() == Periods.Every.RECORD
+                ? set.workbench().periods(Periods.Every.INTERVAL, 1)
+                : reading.periods(set);
+    }
+
+    private OptionalInt marked(List<Period> periods) {
+        int interval = session.interval().get();
+        for (int i = 0; i < periods.size(); i++) {
+            if (periods.get(i).parts().stream().anyMatch(part -> part.interval() == interval)) {
+                return OptionalInt.of(i);
+            }
+        }
+        return OptionalInt.empty();
+    }
+
+    private void change() {
+        Optional<OpenSet> set = session.set().get();
+        last.set(set.map(open -> open.aquifer().times().intervals() - 1).orElse(0));
+        when.set(set.map(open -> PeriodWords.of(
+                        open.workbench()
+                                .periods(Periods.Every.INTERVAL, 1)
+                                .get(session.interval().get()),
+                        open.aquifer().times()))
+                .orElse(""));
+        changes.set(changes.get() + 1);
+    }
+}

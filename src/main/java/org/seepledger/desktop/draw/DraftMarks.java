@@ -1,0 +1,139 @@
+package org.seepledger.desktop.draw;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.seepledger.desktop.map.Camera;
+import org.seepledger.picture.Ink;
+import org.seepledger.picture.Mark;
+import org.seepledger.sketch.Crossings;
+import org.seepledger.sketch.Hit;
+import org.seepledger.sketch.Place;
+import org.seepledger.sketch.Shape;
+import org.seepledger.sketch.Snap;
+
+/** What is drawn over the map while one draws: vertices, the line in hand, what holds the pointer, crossings. */
+final class DraftMarks {
+
+    private static final Ink PAPER = Ink.Token.PAPER;
+    private static final Ink ACCENT = Ink.Token.ACCENT;
+    private static final double VERTEX = 4.2;
+    private static final double GLYPH = 7;
+
+    private final Camera camera;
+    private final List<Mark> marks = new ArrayList<>();
+
+    DraftMarks(Camera camera) {
+        this.camera = camera;
+    }
+
+    List<Mark> list() {
+        return marks;
+    }
+
+    void shape(Shape shape, Pick pick) {
+        for (Pick.SideAt side : pick.sides()) {
+            if (side.ring().shape().equals(shape.name()) && shape.outlines().containsKey(side.ring())) {
+                Place from = shape.outlines().get(side.ring()).place(side.side());
+                Place to = shape.outlines().get(side.ring()).place(side.side() + 1);
+                haloed(new double[] {x(from), y(from), x(to), y(to)}, ACCENT, 4);
+            }
+        }
+        shape.outlines().forEach((ring, outline) -> {
+            for (int vertex = 0; vertex < outline.size(); vertex++) {
+                boolean chosen = pick.vertex().equals(Optional.of(new Hit.Vertex(ring, vertex)));
+                vertex(outline.place(vertex), chosen);
+            }
+        });
+        Crossings.of(shape).forEach(crossing -> cross(crossing.place()));
+    }
+
+    private void vertex(Place place, boolean chosen) {
+        double radius = chosen ? VERTEX + 1.8 : VERTEX;
+        marks.add(new Mark.Area(
+                List.of(regular(x(place), y(place), radius, 16, 0)),
+                Optional.of(Mark.Fill.of(chosen ? ACCENT : PAPER)),
+                Optional.of(Mark.Stroke.of(chosen ? PAPER : Ink.Token.PRISM, 1.6))));
+    }
+
+    /** A crossing stands out by shape as well as colour. */
+    private void cross(Place place) {
+        double x = x(place);
+        double y = y(place);
+        haloed(regular(x, y, 9, 24, 0), Ink.Token.LOSS, 2, true);
+        haloed(new double[] {x - 5, y - 5, x + 5, y + 5}, Ink.Token.LOSS, 2);
+        haloed(new double[] {x - 5, y + 5, x + 5, y - 5}, Ink.Token.LOSS, 2);
+    }
+
+    void stroke(List<Place> places, Optional<Place> pointer, boolean closes) {
+        List<Place> all = new ArrayList<>(places);
+        if (!places.isEmpty()) {
+            pointer.ifPresent(all::add);
+        }
+        double[] xy = new double[2 * all.size()];
+        for (int i = 0; i < all.size(); i++) {
+            xy[2 * i] = x(all.get(i));
+            xy[2 * i + 1] = y(all.get(i));
+        }
+        if (closes && all.size() > 2) {
+            Mark.Fill fill = new Mark.Fill(ACCENT, 0.14, Mark.Texture.PLAIN);
+            marks.add(new Mark.Area(List.of(xy), Optional.of(fill), Optional.empty()));
+            double[] closing = {xy[xy.length - 2], xy[xy.length - 1], xy[0], xy[1]};
+            marks.add(new Mark.Line(closing, Mark.Stroke.of(ACCENT, 1.2).dashed(4.0, 4.0)));
+        }
+        if (all.size() > 1) {
+            haloed(xy, ACCENT, 2);
+        }
+        if (places.size() < 40) {
+            places.forEach(place -> vertex(place, false));
+        }
+    }
+
+    /** A glyph for each kind of target: ring, square, slanted cross, upright cross. */
+    void snap(Snap snap) {
+        double x = x(snap.place());
+        double y = y(snap.place());
+        switch (snap.kind()) {
+            case VERTEX -> haloed(regular(x, y, GLYPH + 2, 24, 0), ACCENT, 2, true);
+            case GRID_CORNER -> haloed(regular(x, y, GLYPH + 2, 4, Math.PI / 4), ACCENT, 2, true);
+            case EDGE -> {
+                haloed(new double[] {x - GLYPH, y - GLYPH, x + GLYPH, y + GLYPH}, ACCENT, 2);
+                haloed(new double[] {x - GLYPH, y + GLYPH, x + GLYPH, y - GLYPH}, ACCENT, 2);
+            }
+            case GRID_LINE -> {
+                haloed(new double[] {x - GLYPH, y, x + GLYPH, y}, ACCENT, 2);
+                haloed(new double[] {x, y - GLYPH, x, y + GLYPH}, ACCENT, 2);
+            }
+        }
+    }
+
+    private void haloed(double[] xy, Ink ink, double width) {
+        haloed(xy, ink, width, false);
+    }
+
+    private void haloed(double[] xy, Ink ink, double width, boolean closed) {
+        for (Mark.Stroke stroke : List.of(Mark.Stroke.of(PAPER, width + 3), Mark.Stroke.of(ink, width))) {
+            marks.add(
+                    closed
+                            ? new Mark.Area(List.of(xy), Optional.empty(), Optional.of(stroke))
+                            : new Mark.Line(xy, stroke));
+        }
+    }
+
+    private static double[] regular(double x, double y, double radius, int corners, double turn) {
+        double[] ring = new double[2 * corners];
+        for (int i = 0; i < corners; i++) {
+            ring[2 * i] = x + radius * Math.cos(turn + 2 * Math.PI * i / corners);
+            ring[2 * i + 1] = y + radius * Math.sin(turn + 2 * Math.PI * i / corners);
+        }
+        return ring;
+    }
+
+    private double x(Place place) {
+        return camera.x(place.x());
+    }
+
+    private double y(Place place) {
+        return camera.y(place.y());
+    }
+}

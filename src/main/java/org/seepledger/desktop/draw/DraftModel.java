@@ -1,0 +1,239 @@
+package org.seepledger.desktop.draw;
+
+import java.util.HashMap;
+import java.util.Map;
+import java.util.Optional;
+import java.util.function.UnaryOperator;
+import javafx.beans.property.ObjectProperty;
+import javafx.beans.property.ReadOnlyLongProperty;
+import javafx.beans.property.ReadOnlyLongWrapper;
+import javafx.beans.property.SimpleObjectProperty;
+import org.seepledger.aquifer.Grid;
+import org.seepledger.aquifer.GriddedValues;
+import org.seepledger.desktop.session.Session;
+import org.seepledger.desktop.words.Words;
+import org.seepledger.sketch.Drawing;
+import org.seepledger.sketch.History;
+import org.seepledger.sketch.Limit;
+import org.seepledger.sketch.Refusal;
+import org.seepledger.sketch.Shape;
+
+/** The drawing of prisms with all its steps; each change is told to the session. */
+public final class DraftModel {
+
+    private final Session session;
+    private final ObjectProperty<Tool> tool = new SimpleObjectProperty<>(Tool.SELECT);
+    private final ReadOnlyLongWrapper version = new ReadOnlyLongWrapper();
+    private History history = new History(Drawing.EMPTY);
+    private Map<Limit.Surface, GriddedValues> surfaces = Map.of();
+    private Drawing saved = Drawing.EMPTY;
+
+    /**
+     * Makes the model.
+     *
+     * @param session is told of each change
+     */
+    public DraftModel(Session session) {
+        this.session = session;
+        session.demand().addListener((demand, before, after) -> {
+            if (after == Session.Demand.DRAW_PRISM) {
+                session.demand().set(Session.Demand.NONE);
+                choose(Tool.POLYGON);
+            }
+        });
+    }
+
+    /**
+     * Begins anew.
+     *
+     * @param kept the drawing as its file has it
+     * @param current the drawing as it is now; another one where work was restored, which can be undone
+     * @param known the surfaces that shapes name
+     */
+    public void begin(Drawing kept, Drawing current, Map<Limit.Surface, GriddedValues> known) {
+        surfaces = Map.copyOf(known);
+        saved = kept;
+        history = new History(kept);
+        tool.set(Tool.SELECT);
+        if (!current.equals(kept)) {
+            history.step(Words.of("step.restore"), current);
+        }
+        current.shapes().stream()
+                .findFirst()
+                .ifPresent(shape -> session.selected().set(shape.name()));
+        publish(true);
+    }
+
+    /** Learns of more surfaces that shapes name. */
+    void know(Map<Limit.Surface, GriddedValues> more) {
+        Map<Limit.Surface, GriddedValues> all = new HashMap<>(surfaces);
+        all.putAll(more);
+        surfaces = Map.copyOf(all);
+    }
+
+    boolean knows(Limit.Surface surface) {
+        return surfaces.containsKey(surface);
+    }
+
+    private void publish(boolean settled) {
+        int layers =
+                session.set().get().map(set -> set.aquifer().layers().size()).orElse(1);
+        session.drawing()
+                .set(new org.seepledger.desktop.session.Drawing(
+                        session.drawing().get().revision() + 1,
+                        history.current().shapes().stream()
+                                .map(shape -> shape.prism(layers, (surface, lid) -> surfaces.get(surface)))
+                                .toList(),
+                        settled));
+        if (history.current().find(session.selected().get()).isEmpty()) {
+            session.selected().set("");
+        }
+        version.set(version.get() + 1);
+    }
+
+    /**
+     * Takes a step at once, or tells in the status line why it is refused.
+     *
+     * @param name the key of the step's name
+     * @param change makes the next drawing
+     * @return whether it was taken
+     */
+    public boolean step(String name, UnaryOperator<Drawing> change) {
+        return tried(() -> {
+            history.step(Words.of(name), change.apply(history.current()));
+            publish(true);
+        });
+    }
+
+    void beginGesture(String name) {
+        history.begin(Words.of(name));
+    }
+
+    /** Shows what a gesture would do; what is refused leaves the last preview. */
+    void preview(UnaryOperator<Drawing> change) {
+        tried(() -> {
+            history.preview(change.apply(history.settled()));
+            publish(false);
+        });
+    }
+
+    void commitGesture() {
+        history.commit();
+        publish(true);
+    }
+
+    void cancelGesture() {
+        history.cancel();
+        publish(true);
+    }
+
+    boolean isGesturing() {
+        return history.isGesturing();
+    }
+
+    private boolean tried(Runnable edit) {
+        try {
+            edit.run();
+            return true;
+        } catch (Refusal refusal) {
+            session.status().set(refusal.getMessage());
+            return false;
+        }
+    }
+
+    /** Undoes a step. */
+    public void undo() {
+        history.undoable().ifPresent(name -> {
+            history.undo();
+            session.status().set(Words.of("undone", name));
+            publish(true);
+        });
+    }
+
+    /** Does a step again. */
+    public void redo() {
+        history.redoable().ifPresent(name -> {
+            history.redo();
+            session.status().set(Words.of("redone", name));
+            publish(true);
+        });
+    }
+
+    /** {@return the name of the step that can be undone} */
+    public Optional<String> undoable() {
+        return history.undoable();
+    }
+
+    /** {@return the name of the step that can be done again} */
+    public Optional<String> redoable() {
+        return history.redoable();
+    }
+
+    /** {@return the drawing as it is shown} */
+    public Drawing drawing() {
+        return history.current();
+    }
+
+    Drawing settled() {
+        return history.settled();
+    }
+
+    /** {@return the selected shape, if there is one} */
+    public Optional<Shape> selected() {
+        return history.current().find(session.selected().get());
+    }
+
+    /**
+     * Chooses a tool; one that needs a prism is refused without one.
+     *
+     * @param chosen the tool
+     */
+    public void choose(Tool chosen) {
+        if (chosen.needsPrism() && selected().isEmpty()) {
+            session.status().set(Words.of("tool.needs"));
+            return;
+        }
+        tool.set(chosen);
+        session.status().set(chosen.hint());
+    }
+
+    /** {@return the tool in hand} */
+    public ObjectProperty<Tool> tool() {
+        return tool;
+    }
+
+    /** {@return grows with each change that is to be seen} */
+    public ReadOnlyLongProperty version() {
+        return version.getReadOnlyProperty();
+    }
+
+    /** {@return whether something is drawn that the file has not} */
+    public boolean isUnsaved() {
+        return !history.settled().equals(saved);
+    }
+
+    /**
+     * A file has the drawing now.
+     *
+     * @param kept what it has
+     */
+    public void kept(Drawing kept) {
+        saved = kept;
+        version.set(version.get() + 1);
+    }
+
+    /** {@return what the window looks at} */
+    public Session session() {
+        return session;
+    }
+
+    Optional<Grid> grid() {
+        return session.set().get().map(set -> set.aquifer().grid());
+    }
+
+    /** How near two places count as one when prisms are cut or joined: far below what can be seen. */
+    double near() {
+        return grid().map(grid -> 1e-7 * Math.min(grid.x().smallest(), grid.y().smallest()))
+                .orElse(0.0);
+    }
+}

@@ -1,0 +1,93 @@
+package org.seepledger.desktop.draw;
+
+import java.util.List;
+import java.util.Optional;
+import org.seepledger.desktop.map.Touch;
+import org.seepledger.sketch.Drawing;
+import org.seepledger.sketch.Nearness;
+import org.seepledger.sketch.Place;
+import org.seepledger.sketch.Shape;
+import org.seepledger.sketch.Snapping;
+import org.seepledger.sketch.Stroke;
+
+/** Draws place by place: a new prism, an island, or the line that cuts a prism. */
+final class StrokeHand {
+
+    private final DraftModel model;
+    private final Snapper snapper;
+    private Stroke stroke = Stroke.EMPTY;
+    private Optional<Place> pointer = Optional.empty();
+
+    StrokeHand(DraftModel model, Snapper snapper) {
+        this.model = model;
+        this.snapper = snapper;
+    }
+
+    void hover(Touch touch) {
+        pointer = Optional.of(snapper.held(Snapping.to(model.drawing(), model.grid()), touch));
+    }
+
+    void press(Touch touch) {
+        hover(touch);
+        Place place = pointer.orElseThrow();
+        boolean onFirst = stroke.places().size() > 2
+                && model.tool().get() != Tool.SPLIT
+                && stroke.places().get(0).distance(new Place(touch.x(), touch.y()))
+                        <= Nearness.ofPixel(touch.pixel()).vertex();
+        if (onFirst) {
+            finish();
+        } else {
+            add(place);
+        }
+    }
+
+    void add(Place place) {
+        stroke = stroke.to(place);
+    }
+
+    void back() {
+        stroke = stroke.back();
+    }
+
+    void cancel() {
+        stroke = Stroke.EMPTY;
+        pointer = Optional.empty();
+        snapper.letGo();
+    }
+
+    /** What is refused stays as it is drawn, to be mended. */
+    void finish() {
+        boolean done = switch (model.tool().get()) {
+            case ISLAND ->
+                model.selected()
+                        .map(shape -> model.step("step.island", drawing -> island(drawing, shape)))
+                        .orElse(false);
+            case SPLIT ->
+                model.selected()
+                        .map(shape -> model.step(
+                                "step.split", drawing -> drawing.split(shape.name(), stroke.places(), model.near())))
+                        .orElse(false);
+            default -> draw();
+        };
+        if (done) {
+            cancel();
+            model.choose(Tool.SELECT);
+        }
+    }
+
+    private Drawing island(Drawing drawing, Shape shape) {
+        return drawing.edit(shape.name(), before -> before.with(stroke.closed()));
+    }
+
+    private boolean draw() {
+        return Fresh.prism(model, "step.polygon", stroke::closed);
+    }
+
+    List<Place> places() {
+        return stroke.places();
+    }
+
+    Optional<Place> pointer() {
+        return pointer;
+    }
+}

@@ -1,0 +1,203 @@
+package org.seepledger.desktop.ledger;
+
+import java.util.List;
+import java.util.Optional;
+import java.util.stream.DoubleStream;
+import javafx.beans.property.ObjectProperty;
+import javafx.beans.property.ReadOnlyObjectProperty;
+import javafx.beans.property.ReadOnlyObjectWrapper;
+import javafx.beans.property.ReadOnlyStringProperty;
+import javafx.beans.property.ReadOnlyStringWrapper;
+import javafx.beans.property.SimpleObjectProperty;
+import javafx.collections.FXCollections;
+import javafx.collections.ObservableList;
+import org.seepledger.aquifer.Layer;
+import org.seepledger.balance.Periods;
+import org.seepledger.desktop.budget.BudgetShown;
+import org.seepledger.desktop.budget.LiveBudget;
+import org.seepledger.desktop.budget.Reading;
+import org.seepledger.desktop.port.CopyBoard;
+import org.seepledger.desktop.session.OpenSet;
+import org.seepledger.desktop.session.Session;
+import org.seepledger.desktop.task.PaneState;
+import org.seepledger.desktop.words.Words;
+import org.seepledger.ledger.Period;
+import org.seepledger.prism.Prism;
+
+/** The ledger of the selected prism: its rows, which geometry and time they belong to, and which face is lit up. */
+public final class LedgerModel {
+
+    private final Session session;
+    private final LiveBudget live;
+    private final Reading reading;
+    private final CopyBoard copies;
+    private final ObservableList<LedgerRow> rows = FXCollections.observableArrayList();
+    private final ReadOnlyStringWrapper belongs = new ReadOnlyStringWrapper("");
+    private final ReadOnlyStringWrapper notes = new ReadOnlyStringWrapper("");
+    private final ReadOnlyStringWrapper unit = new ReadOnlyStringWrapper("");
+    private final ReadOnlyObjectWrapper<PaneState> state = new ReadOnlyObjectWrapper<>(PaneState.READY);
+    private final ObjectProperty<Arrangement> arrangement = new SimpleObjectProperty<>(Arrangement.ITEMS);
+    private final ObjectProperty<Order> order = new SimpleObjectProperty<>(Order.AS_DRAWN);
+    private double largest;
+
+    /**
+     * Makes the model.
+     *
+     * @param session what the window looks at
+     * @param live the budgets
+     * @param reading how figures are read
+     * @param copies where copies go
+     */
+    public LedgerModel(Session session, LiveBudget live, Reading reading, CopyBoard copies) {
+        this.session = session;
+        this.live = live;
+        this.reading = reading;
+        this.copies = copies;
+        live.known().addListener((known, before, after) -> show());
+        live.now().addListener((now, before, after) -> showState());
+        live.record().addListener((record, before, after) -> showState());
+        session.selected().addListener((selected, before, after) -> show());
+        session.interval().addListener((interval, before, after) -> show());
+        reading.changes().addListener((changes, before, after) -> show());
+        arrangement.addListener((arranged, before, after) -> show());
+        order.addListener((ordered, before, after) -> show());
+        show();
+    }
+
+    /** {@return the rows} */
+    public ObservableList<LedgerRow> rows() {
+        return rows;
+    }
+
+    /** {@return which geometry and time the rows belong to} */
+    public ReadOnlyStringProperty belongs() {
+        return belongs.getReadOnlyProperty();
+    }
+
+    /** {@return what was done to the prism before it was balanced; empty for nothing} */
+    public ReadOnlyStringProperty notes() {
+        return notes.getReadOnlyProperty();
+    }
+
+    /** Asks the map to begin a prism. */
+    public void draw() {
+        live.draw();
+    }
+
+    /** {@return the unit of the numbers} */
+    public ReadOnlyStringProperty unit() {
+        return unit.getReadOnlyProperty();
+    }
+
+    /** {@return which state the pane is in} */
+    public ReadOnlyObjectProperty<PaneState> state() {
+        return state.getReadOnlyProperty();
+    }
+
+    /** {@return how rows are laid out} */
+    public ObjectProperty<Arrangement> arrangement() {
+        return arrangement;
+    }
+
+    /** {@return in which order rows stand} */
+    public ObjectProperty<Order> order() {
+        return order;
+    }
+
+    /** {@return how figures are read} */
+    public Reading reading() {
+        return reading;
+    }
+
+    /**
+     * Sorts by something, or by nothing when it is sorted so already.
+     *
+     * @param by the order
+     */
+    public void sort(Order by) {
+        order.set(order.get() == by ? Order.AS_DRAWN : by);
+    }
+
+    /**
+     * Lights up the face that a row is about; none if it is about something else.
+     *
+     * @param row the row
+     */
+    public void light(LedgerRow row) {
+        session.lit().set(row.isFace() ? row.item() : "");
+    }
+
+    /** {@return the first row about the face that is lit up, if there is one} */
+    public Optional<LedgerRow> lit() {
+        String item = session.lit().get();
+        return rows.stream()
+                .filter(LedgerRow::isFace)
+                .filter(row -> row.item().equals(item))
+                .findFirst();
+    }
+
+    /** {@return the face that is lit up} */
+    public ReadOnlyStringProperty litItem() {
+        return session.lit();
+    }
+
+    /** Copies the rows with their units, in full precision. */
+    public void copy() {
+        if (!rows.isEmpty()) {
+            LedgerCopy copy = new LedgerCopy(belongs.get(), unit.get(), rows);
+            copies.table(copy.tabSeparated(), copy.html());
+            session.status().set(Words.of("ledger.copied", belongs.get()));
+        }
+    }
+
+    /**
+     * {@return a number as a share of the largest of all rows, from 0 to 1}
+     *
+     * @param value what comes in or goes out
+     */
+    public double share(double value) {
+        return largest == 0 || Double.isNaN(value) ? 0 : value / largest;
+    }
+
+    private void show() {
+        Optional<OpenSet> set = session.set().get();
+        Optional<Prism> prism = session.selectedPrism();
+        if (set.isPresent() && prism.isPresent()) {
+            Period period = reading.period(set.get(), session.interval().get());
+            live.known()
+                    .get()
+                    .budget(prism.get(), period)
+                    .ifPresentOrElse(shown -> show(set.get(), shown), this::clear);
+        } else {
+            clear();
+        }
+        showState();
+    }
+
+    private void show(OpenSet set, BudgetShown shown) {
+        List<String> layers = set.aquifer().layers().stream().map(Layer::name).toList();
+        List<LedgerRow> arranged =
+                new LedgerRows(shown.budget(), layers, reading.shown(set), order.get()).arranged(arrangement.get());
+        largest = arranged.stream()
+                .filter(row -> row.kind() == LedgerRow.Kind.ENTRY)
+                .flatMapToDouble(row -> DoubleStream.of(row.inflow(), row.outflow()))
+                .filter(value -> !Double.isNaN(value))
+                .max()
+                .orElse(0);
+        rows.setAll(arranged);
+        unit.set(reading.unitName(set));
+        belongs.set(shown.whose(set));
+        notes.set(String.join(" ", shown.notes()));
+    }
+
+    private void clear() {
+        rows.clear();
+        belongs.set("");
+        notes.set("");
+    }
+
+    private void showState() {
+        boolean quick = reading.every().get() == Periods.Every.INTERVAL;
+        state.set(quick ? live.now().get() : live.record().get());
+    }
+}

@@ -1,0 +1,143 @@
+package org.seepledger.desktop.ledger;
+
+import javafx.collections.ListChangeListener;
+import javafx.css.PseudoClass;
+import javafx.scene.control.Button;
+import javafx.scene.control.Label;
+import javafx.scene.control.TableColumn;
+import javafx.scene.control.TableRow;
+import javafx.scene.control.TableView;
+import javafx.scene.input.KeyCode;
+import javafx.scene.input.KeyCodeCombination;
+import javafx.scene.input.KeyCombination;
+import javafx.scene.layout.BorderPane;
+import org.seepledger.desktop.pane.StatePane;
+import org.seepledger.desktop.words.Words;
+
+/** The ledger as a table. */
+public final class LedgerView extends BorderPane {
+
+    private static final KeyCombination COPY = new KeyCodeCombination(KeyCode.C, KeyCombination.SHORTCUT_DOWN);
+    private static final PseudoClass HEADING = PseudoClass.getPseudoClass("heading");
+    private static final PseudoClass TOTAL = PseudoClass.getPseudoClass("total");
+
+    private final LedgerModel model;
+    private final TableView<LedgerRow> table = new TableView<>();
+    private boolean following;
+
+    /**
+     * Builds the table.
+     *
+     * @param model what it shows
+     */
+    public LedgerView(LedgerModel model) {
+        this.model = model;
+        setId("ledger");
+        getStyleClass().add("sl-ledger");
+        setTop(new LedgerChoices(model));
+        buildTable();
+        setCenter(new StatePane(table, model.state()).withAction(Words.of("budget.draw"), model::draw));
+    }
+
+    private void buildTable() {
+        table.setId("ledger-table");
+        table.setItems(model.rows());
+        table.setColumnResizePolicy(TableView.CONSTRAINED_RESIZE_POLICY_FLEX_LAST_COLUMN);
+        table.setPlaceholder(new Label());
+        table.getColumns().add(nameColumn());
+        table.getColumns().add(numbers("ledger.in", Order.LARGEST_IN, LedgerRow::inflow));
+        table.getColumns().add(numbers("ledger.out", Order.LARGEST_OUT, LedgerRow::outflow));
+        table.getColumns().add(numbers("ledger.net", Order.LARGEST_NET, LedgerRow::net));
+        table.getColumns().add(scaleColumn());
+        table.setRowFactory(made -> new KindRow());
+        table.getSelectionModel().selectedItemProperty().addListener((row, before, after) -> {
+            if (!following && after != null) {
+                model.light(after);
+            }
+        });
+        model.litItem().addListener((item, before, after) -> follow());
+        model.rows().addListener((ListChangeListener<LedgerRow>) change -> follow());
+        table.setOnKeyPressed(key -> {
+            if (COPY.match(key)) {
+                model.copy();
+                key.consume();
+            }
+        });
+    }
+
+    /** Selects the row of the face that is lit up, and lets go of others. */
+    private void follow() {
+        following = true;
+        model.lit().ifPresentOrElse(row -> table.getSelectionModel().select(row), this::letGo);
+        following = false;
+    }
+
+    private void letGo() {
+        LedgerRow selected = table.getSelectionModel().getSelectedItem();
+        if (selected == null || selected.isFace()) {
+            table.getSelectionModel().clearSelection();
+        }
+    }
+
+    private TableColumn<LedgerRow, LedgerRow> nameColumn() {
+        TableColumn<LedgerRow, LedgerRow> column = new TableColumn<>();
+        column.setGraphic(header("ledger.item", Order.AS_DRAWN));
+        column.setMinWidth(110);
+        column.setPrefWidth(136);
+        return shown(column, new NameCell.Factory());
+    }
+
+    private TableColumn<LedgerRow, LedgerRow> numbers(String words, Order order, NumberCell.Value value) {
+        TableColumn<LedgerRow, LedgerRow> column = new TableColumn<>();
+        column.setGraphic(header(words, order));
+        column.getStyleClass().add("sl-numbers");
+        column.setMinWidth(102);
+        column.setPrefWidth(102);
+        return shown(column, new NumberCell.Factory(value));
+    }
+
+    private TableColumn<LedgerRow, LedgerRow> scaleColumn() {
+        TableColumn<LedgerRow, LedgerRow> column = new TableColumn<>();
+        column.setMinWidth(60);
+        column.setPrefWidth(90);
+        return shown(column, new ScaleCell.Factory(model));
+    }
+
+    private static TableColumn<LedgerRow, LedgerRow> shown(
+            TableColumn<LedgerRow, LedgerRow> column,
+            javafx.util.Callback<
+                            TableColumn<LedgerRow, LedgerRow>, javafx.scene.control.TableCell<LedgerRow, LedgerRow>>
+                    cells) {
+        column.setSortable(false);
+        column.setReorderable(false);
+        column.setCellValueFactory(row -> new javafx.beans.property.SimpleObjectProperty<>(row.getValue()));
+        column.setCellFactory(cells);
+        return column;
+    }
+
+    private Button header(String words, Order order) {
+        Button button = new Button(Words.of(words));
+        button.setId("sort-" + order.name().toLowerCase(java.util.Locale.ROOT).replace('_', '-'));
+        button.getStyleClass().add("sl-header");
+        button.setFocusTraversable(false);
+        button.setOnAction(pressed -> model.sort(order));
+        button.pseudoClassStateChanged(
+                PseudoClass.getPseudoClass("sorted"), model.order().get() == order);
+        model.order()
+                .addListener((ordered, before, after) -> button.pseudoClassStateChanged(
+                        PseudoClass.getPseudoClass("sorted"), after == order && order != Order.AS_DRAWN));
+        return button;
+    }
+
+    /** Tells headings and totals apart from other rows. */
+    private static final class KindRow extends TableRow<LedgerRow> {
+
+        @Override
+        protected void updateItem(LedgerRow row, boolean empty) {
+            super.updateItem(row, empty);
+            LedgerRow.Kind kind = empty || row == null ? LedgerRow.Kind.ENTRY : row.kind();
+            pseudoClassStateChanged(HEADING, kind == LedgerRow.Kind.HEADING);
+            pseudoClassStateChanged(TOTAL, kind == LedgerRow.Kind.TOTAL || kind == LedgerRow.Kind.PERCENTAGE);
+        }
+    }
+}

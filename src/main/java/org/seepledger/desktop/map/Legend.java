@@ -1,0 +1,142 @@
+package org.seepledger.desktop.map;
+
+import java.util.List;
+import java.util.Optional;
+import javafx.beans.value.ObservableValue;
+import javafx.geometry.Pos;
+import javafx.scene.canvas.Canvas;
+import javafx.scene.canvas.GraphicsContext;
+import javafx.scene.control.Button;
+import javafx.scene.control.Label;
+import javafx.scene.control.TextField;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
+import javafx.scene.layout.VBox;
+import org.seepledger.desktop.paint.MarkPainter;
+import org.seepledger.desktop.theme.Theme;
+import org.seepledger.desktop.words.Words;
+import org.seepledger.job.MapQuantity;
+import org.seepledger.picture.Ink;
+import org.seepledger.picture.Mark;
+import org.seepledger.picture.Ticks;
+import org.seepledger.picture.ValueScale;
+
+/** Which colour stands for which value; the ends of the range are typed, or fitted to what is shown. */
+final class Legend extends VBox {
+
+    private static final double WIDTH = 236;
+    private static final double BAR = 12;
+    private static final double SIDE = 18;
+
+    private final ValuesModel model;
+    private final ObservableValue<Theme> theme;
+    private final Label title = new Label();
+    private final Canvas bar = new Canvas(WIDTH, BAR + 20);
+    private final TextField from = field("range-from");
+    private final TextField to = field("range-to");
+
+    Legend(ValuesModel model, ObservableValue<Theme> theme) {
+        this.model = model;
+        this.theme = theme;
+        setId("legend");
+        getStyleClass().add("sl-float");
+        title.getStyleClass().add("sl-strong");
+        Region gap = new Region();
+        HBox.setHgrow(gap, Priority.ALWAYS);
+        Button fit = new Button(Words.of("map.range.fit"));
+        fit.setId("range-fit");
+        fit.getStyleClass().addAll("small", "flat");
+        fit.setOnAction(pressed -> model.fitRange());
+        HBox ends = new HBox(6, from, new Label(Words.of("map.range.to")), to, gap, fit);
+        ends.setAlignment(Pos.CENTER_LEFT);
+        getChildren().addAll(title, bar, ends);
+        setMaxSize(USE_PREF_SIZE, USE_PREF_SIZE);
+        for (TextField field : List.of(from, to)) {
+            field.setOnAction(entered -> take());
+            field.focusedProperty().addListener((focus, before, now) -> {
+                if (!now) {
+                    take();
+                }
+            });
+        }
+        model.scale().addListener((scale, before, after) -> show());
+        model.view().addListener((view, before, after) -> show());
+        theme.addListener((lit, before, after) -> show());
+        show();
+    }
+
+    private static TextField field(String id) {
+        TextField field = new TextField();
+        field.setId(id);
+        field.setPrefColumnCount(6);
+        field.getStyleClass().add("small");
+        return field;
+    }
+
+    /** What cannot be taken is put back as it was. */
+    private void take() {
+        Optional<ValueScale> scale = model.scale().get();
+        if (scale.isEmpty()) {
+            return;
+        }
+        String[] now = {text(scale.get().from()), text(scale.get().to())};
+        if (from.getText().equals(now[0]) && to.getText().equals(now[1])) {
+            return;
+        }
+        if (!model.range(number(from.getText()), number(to.getText()))) {
+            show();
+        }
+    }
+
+    private static double number(String text) {
+        try {
+            return Double.parseDouble(text.strip().replace('−', '-').replace(',', '.'));
+        } catch (NumberFormatException e) {
+            return Double.NaN;
+        }
+    }
+
+    /** Enough digits for the eye; the range itself keeps all. */
+    private static String text(double value) {
+        String text = new java.math.BigDecimal(value)
+                .round(new java.math.MathContext(5))
+                .stripTrailingZeros()
+                .toPlainString();
+        return text.length() > 9 ? String.format(java.util.Locale.ROOT, "%.3e", value) : text;
+    }
+
+    private void show() {
+        Optional<ValueScale> scale = model.scale().get();
+        setVisible(scale.isPresent() && model.view().get().isPresent());
+        if (isVisible()) {
+            MapQuantity quantity = model.view().get().orElseThrow().request().quantity();
+            title.setText(Words.of("map.legend", quantity.label(), quantity.unit()));
+            from.setText(text(scale.get().from()));
+            to.setText(text(scale.get().to()));
+            paint(scale.get());
+        }
+    }
+
+    private void paint(ValueScale scale) {
+        GraphicsContext canvas = bar.getGraphicsContext2D();
+        canvas.clearRect(0, 0, bar.getWidth(), bar.getHeight());
+        MarkPainter painter = new MarkPainter(canvas, theme.getValue());
+        double length = WIDTH - 2 * SIDE;
+        int[] colours = new int[256];
+        for (int i = 0; i < colours.length; i++) {
+            colours[i] = 0xff000000 | scale.ramp().rgb(i / 255.0);
+        }
+        double[] placement = {length / colours.length, 0, 0, BAR, SIDE, 0};
+        painter.paint(List.of(new Mark.Image(colours.length, 1, colours, placement)));
+        Ticks ticks = Ticks.within(scale.from(), scale.to(), 4);
+        for (int i = 0; i < ticks.count(); i++) {
+            double x = SIDE + length * (ticks.values().get(i) - scale.from()) / (scale.to() - scale.from());
+            double[] tick = {x, BAR, x, BAR + 4};
+            painter.paint(List.of(
+                    new Mark.Line(tick, Mark.Stroke.of(Ink.Token.MUTED, 1)),
+                    Mark.Text.of(x, BAR + 16, ticks.label(i), 11, Mark.Anchor.MIDDLE)
+                            .in(Ink.Token.MUTED)));
+        }
+    }
+}

@@ -1,0 +1,158 @@
+package org.seepledger.desktop.map;
+
+import java.util.ArrayList;
+import java.util.List;
+import javafx.beans.Observable;
+import javafx.beans.value.ObservableValue;
+import javafx.scene.canvas.Canvas;
+import javafx.scene.canvas.GraphicsContext;
+import javafx.scene.layout.Region;
+import org.seepledger.aquifer.Aquifer;
+import org.seepledger.desktop.paint.MarkPainter;
+import org.seepledger.desktop.paint.Paints;
+import org.seepledger.desktop.session.OpenSet;
+import org.seepledger.desktop.session.Session;
+import org.seepledger.desktop.task.Tasks;
+import org.seepledger.desktop.theme.Theme;
+import org.seepledger.picture.Ink;
+import org.seepledger.picture.Mark;
+
+/** Paints the map, once per frame at most: the ground on one canvas, prisms and letters on another over it. */
+final class MapCanvas extends Region {
+
+    private final MapModel model;
+    private final ObservableValue<Theme> theme;
+    private final Canvas ground = new Canvas();
+    private final Canvas above = new Canvas();
+    private final Tiles tiles;
+    private final List<MarkSource> guests = new ArrayList<>();
+    private boolean groundStale = true;
+
+    /** What else draws over the map. */
+    interface MarkSource {
+        List<Mark> marks(Camera camera);
+    }
+
+    MapCanvas(MapModel model, Tasks tasks, ObservableValue<Theme> theme) {
+        this.model = model;
+        this.theme = theme;
+        this.tiles = new Tiles(tasks.each("colouring tiles", 1), this::repaintGround);
+        getChildren().addAll(ground, above);
+        Session session = model.session();
+        Observable[] under = {
+            model.camera(),
+            model.values().view(),
+            model.values().scale(),
+            model.contours().lines(),
+            model.flux().field(),
+            model.overlays().lines(),
+            model.overlays().arrows(),
+            theme
+        };
+        Observable[] over = {
+            session.drawing(),
+            session.selected(),
+            session.lit(),
+            session.faceFlows(),
+            model.wells(),
+            model.overlays().wells()
+        };
+        for (Observable cause : under) {
+            cause.addListener(changed -> repaintGround());
+        }
+        for (Observable cause : over) {
+            cause.addListener(changed -> repaint());
+        }
+    }
+
+    /** Lets something else draw over the map. */
+    void invite(MarkSource guest) {
+        guests.add(guest);
+    }
+
+    private void repaintGround() {
+        groundStale = true;
+        repaint();
+    }
+
+    /** Paints what lies over the ground in the next frame. */
+    void repaint() {
+        requestLayout();
+    }
+
+    @Override
+    protected void layoutChildren() {
+        double width = Math.floor(getWidth());
+        double height = Math.floor(getHeight());
+        if (width != ground.getWidth() || height != ground.getHeight()) {
+            for (Canvas canvas : List.of(ground, above)) {
+                canvas.setWidth(width);
+                canvas.setHeight(height);
+            }
+            model.resize(width, height);
+            groundStale = true;
+        }
+        if (groundStale) {
+            groundStale = false;
+            paintGround();
+        }
+        paintAbove();
+    }
+
+    private double outputScale() {
+        return getScene() == null || getScene().getWindow() == null
+                ? 1
+                : getScene().getWindow().getOutputScaleX();
+    }
+
+    private void paintGround() {
+        GraphicsContext canvas = ground.getGraphicsContext2D();
+        canvas.setFill(Paints.of(Ink.Token.PAPER, 1, theme.getValue()));
+        canvas.fillRect(0, 0, ground.getWidth(), ground.getHeight());
+        canvas.setFill(Paints.of(Ink.Token.GUIDE, 0.35, theme.getValue()));
+        canvas.fillRect(0, 0, ground.getWidth(), ground.getHeight());
+        if (model.session().set().get().isEmpty()) {
+            return;
+        }
+        Aquifer aquifer = model.session().set().get().map(OpenSet::aquifer).orElseThrow();
+        Camera camera = model.camera().get();
+        tiles.wear(model.values().view().get(), model.values().scale().get());
+        tiles.pyramid().ifPresent(pyramid -> new TilePainter(canvas, camera, outputScale(), tiles, pyramid).paint());
+        MarkPainter painter = new MarkPainter(canvas, theme.getValue());
+        if (model.overlays().lines().get()) {
+            painter.paint(GridLines.of(aquifer.grid(), camera, outputScale()));
+        }
+        painter.paint(contours(camera));
+        if (model.overlays().arrows().get()) {
+            model.flux().field().get().ifPresent(field -> painter.paint(FluxArrows.of(field, aquifer.grid(), camera)));
+        }
+    }
+
+    private List<Mark> contours(Camera camera) {
+        List<Mark> marks = new ArrayList<>();
+        for (ContourModel.Contour contour : model.contours().lines().get()) {
+            for (double[] line : contour.lines()) {
+                double[] xy = OnScreen.thinned(line, camera);
+                if (xy.length > 2) {
+                    marks.add(new Mark.Line(xy, Mark.Stroke.of(Ink.Token.PAPER, 2.2)));
+                    marks.add(new Mark.Line(xy, Mark.Stroke.of(Ink.Token.TEXT, 0.9)));
+                }
+            }
+        }
+        return marks;
+    }
+
+    private void paintAbove() {
+        GraphicsContext canvas = above.getGraphicsContext2D();
+        canvas.clearRect(0, 0, above.getWidth(), above.getHeight());
+        if (model.session().set().get().isEmpty()) {
+            return;
+        }
+        Camera camera = model.camera().get();
+        MarkPainter painter = new MarkPainter(canvas, theme.getValue());
+        painter.paint(Outlines.of(model.session(), camera));
+        painter.paint(Lettering.of(model));
+        guests.forEach(guest -> painter.paint(guest.marks(camera)));
+        painter.paint(ScaleBar.of(model.session().set().get().orElseThrow().aquifer(), camera));
+    }
+}

@@ -1,0 +1,108 @@
+package org.seepledger.desktop.session;
+
+import java.util.Optional;
+import javafx.beans.property.IntegerProperty;
+import javafx.beans.property.ObjectProperty;
+import javafx.beans.property.ReadOnlyObjectProperty;
+import javafx.beans.property.ReadOnlyObjectWrapper;
+import javafx.beans.property.SimpleIntegerProperty;
+import javafx.beans.property.SimpleObjectProperty;
+import javafx.beans.property.SimpleStringProperty;
+import javafx.beans.property.StringProperty;
+import org.seepledger.prism.Prism;
+import org.seepledger.report.CellPlace;
+
+/** What the window looks at. Used on the window's own thread alone. */
+public final class Session {
+
+    private final ReadOnlyObjectWrapper<Optional<OpenSet>> set = new ReadOnlyObjectWrapper<>(Optional.empty());
+    private final ObjectProperty<Drawing> drawing = new SimpleObjectProperty<>(Drawing.NONE);
+    private final IntegerProperty interval = new SimpleIntegerProperty();
+    private final IntegerProperty layer = new SimpleIntegerProperty();
+    private final StringProperty selected = new SimpleStringProperty("");
+    private final StringProperty lit = new SimpleStringProperty("");
+    private final StringProperty status = new SimpleStringProperty("");
+    private final ObjectProperty<FaceFlows> faceFlows = new SimpleObjectProperty<>(FaceFlows.NONE);
+    private final ObjectProperty<Optional<CellPlace>> target = new SimpleObjectProperty<>(Optional.empty());
+    private final ObjectProperty<Demand> demand = new SimpleObjectProperty<>(Demand.NONE);
+
+    /** What one pane asks of the map. */
+    public enum Demand {
+        /** Nothing. */
+        NONE,
+        /** To show where the selected prism does not close. */
+        SHOW_IMBALANCE,
+        /** To begin to draw a prism. */
+        DRAW_PRISM
+    }
+
+    /**
+     * Puts another set before the user, with nothing drawn on it.
+     *
+     * @param opened the set; empty for none
+     */
+    public void show(Optional<OpenSet> opened) {
+        lit.set("");
+        faceFlows.set(FaceFlows.NONE);
+        selected.set("");
+        interval.set(0);
+        layer.set(0);
+        drawing.set(new Drawing(drawing.get().revision() + 1, Drawing.NONE.prisms(), true));
+        set.set(opened);
+    }
+
+    /** {@return the open set, if any} */
+    public ReadOnlyObjectProperty<Optional<OpenSet>> set() {
+        return set.getReadOnlyProperty();
+    }
+
+    /** {@return what is drawn} */
+    public ObjectProperty<Drawing> drawing() {
+        return drawing;
+    }
+
+    /** {@return the interval looked at, from 0} */
+    public IntegerProperty interval() {
+        return interval;
+    }
+
+    /** {@return the layer looked at, from 0} */
+    public IntegerProperty layer() {
+        return layer;
+    }
+
+    /** {@return the selected prism's name; empty for none} */
+    public StringProperty selected() {
+        return selected;
+    }
+
+    /** {@return the selected prism as it is drawn now, if there is one} */
+    public Optional<Prism> selectedPrism() {
+        return drawing.get().prism(selected.get());
+    }
+
+    /** {@return the item of the selected prism's face that is lit up, as {@code side 3}; empty for none} */
+    public StringProperty lit() {
+        return lit;
+    }
+
+    /** {@return what the status line says} */
+    public StringProperty status() {
+        return status;
+    }
+
+    /** {@return what flows through the selected prism's faces, for arrows on the map} */
+    public ObjectProperty<FaceFlows> faceFlows() {
+        return faceFlows;
+    }
+
+    /** {@return the place that a pane asks the map to go to; whoever goes there empties it} */
+    public ObjectProperty<Optional<CellPlace>> target() {
+        return target;
+    }
+
+    /** {@return what a pane asks of the map; whoever meets it sets it back to none} */
+    public ObjectProperty<Demand> demand() {
+        return demand;
+    }
+}

@@ -1,0 +1,54 @@
+package org.seepledger.desktop.shell;
+
+import javafx.beans.binding.Bindings;
+import javafx.scene.Node;
+import javafx.scene.control.Button;
+import javafx.scene.control.Label;
+import javafx.scene.control.Tooltip;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.Region;
+import org.seepledger.desktop.theme.Theme;
+import org.seepledger.desktop.words.Words;
+
+/** The line on top: which aquifer, and as a sentence what of it is shown. */
+final class Caption extends HBox {
+
+    Caption(ShellModel model, Node showing, Runnable actions) {
+        getStyleClass().add("sl-caption");
+        Button name = button("", model::turnPage, "caption.name.tip");
+        name.setId("set-name");
+        name.getStyleClass().addAll("flat", "sl-name");
+        model.session()
+                .set()
+                .addListener((set, before, after) -> name.setText(model.name().orElse("")));
+        name.setText(model.name().orElse(""));
+        name.setMinWidth(USE_PREF_SIZE);
+        Region gap = new Region();
+        setHgrow(gap, Priority.ALWAYS);
+        Label mark = new Label("≋");
+        mark.getStyleClass().add("sl-mark");
+        getChildren().addAll(mark, name, showing, gap, theme(model), button(Words.of("caption.actions"), actions, ""));
+    }
+
+    private static Button theme(ShellModel model) {
+        Button theme = button("", model::switchTheme, "caption.theme.tip");
+        theme.setId("theme");
+        theme.textProperty()
+                .bind(Bindings.createStringBinding(
+                        () -> Words.of(model.theme().get() == Theme.LIGHT ? "caption.dark" : "caption.light"),
+                        model.theme()));
+        return theme;
+    }
+
+    private static Button button(String words, Runnable does, String tip) {
+        Button button = new Button(words);
+        button.getStyleClass().add("flat");
+        button.setMinWidth(USE_PREF_SIZE);
+        button.setOnAction(pressed -> does.run());
+        if (!tip.isEmpty()) {
+            button.setTooltip(new Tooltip(Words.of(tip)));
+        }
+        return button;
+    }
+}

@@ -1,0 +1,36 @@
+package org.seepledger.desktop.shell;
+
+import javafx.scene.control.Button;
+import javafx.scene.control.Label;
+import javafx.scene.layout.VBox;
+import org.seepledger.desktop.words.Words;
+import org.seepledger.ledger.Disclaimer;
+
+/** The caution in full. */
+final class CautionPage extends VBox {
+
+    CautionPage(Runnable close) {
+        setId("caution-page");
+        getStyleClass().add("sl-sheet");
+        setMaxSize(600, USE_PREF_SIZE);
+        Label title = new Label(Words.of("caution.title"));
+        title.getStyleClass().add("sl-heading");
+        getChildren().add(title);
+        Disclaimer.sentences().forEach(sentence -> {
+            Label line = new Label(sentence);
+            line.setWrapText(true);
+            line.setMinHeight(USE_PREF_SIZE);
+            getChildren().add(line);
+        });
+        Button done = new Button(Words.of("close"));
+        done.setDefaultButton(true);
+        done.setCancelButton(true);
+        done.setOnAction(pressed -> close.run());
+        getChildren().add(done);
+    }
+
+    @Override
+    public void requestFocus() {
+        getChildren().get(getChildren().size() - 1).requestFocus();
+    }
+}

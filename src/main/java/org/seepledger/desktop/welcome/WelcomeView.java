@@ -1,0 +1,165 @@
+package org.seepledger.desktop.welcome;
+
+import java.io.File;
+import javafx.collections.ListChangeListener;
+import javafx.collections.ObservableList;
+import javafx.geometry.Pos;
+import javafx.scene.Node;
+import javafx.scene.control.Button;
+import javafx.scene.control.Label;
+import javafx.scene.control.ScrollPane;
+import javafx.scene.control.Tooltip;
+import javafx.scene.input.DragEvent;
+import javafx.scene.input.TransferMode;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.StackPane;
+import javafx.scene.layout.VBox;
+import org.seepledger.desktop.task.PaneState;
+import org.seepledger.desktop.words.Words;
+
+/** The first page. */
+public final class WelcomeView extends StackPane {
+
+    private static final double WIDTH = 1000;
+    private static final double CARD_WIDTH = 420;
+
+    private final WelcomeModel model;
+    private final VBox drop = new VBox();
+    private final Label fault = new Label();
+
+    /**
+     * Builds the page.
+     *
+     * @param model what can be opened
+     */
+    public WelcomeView(WelcomeModel model) {
+        this.model = model;
+        setId("welcome");
+        VBox page = new VBox(title(), fault(), columns());
+        page.getStyleClass().add("sl-welcome");
+        page.setMaxWidth(WIDTH + 96);
+        StackPane centred = new StackPane(page);
+        centred.setAlignment(Pos.TOP_CENTER);
+        ScrollPane scroll = new ScrollPane(centred);
+        scroll.setFitToWidth(true);
+        scroll.setFitToHeight(true);
+        getChildren().add(scroll);
+        setOnDragOver(this::onDragOver);
+        setOnDragExited(drag -> drop.getStyleClass().remove("over"));
+        setOnDragDropped(this::onDropped);
+    }
+
+    private static Node title() {
+        Label name = new Label(Words.of("program"));
+        name.getStyleClass().add("sl-title");
+        Label lead = new Label(Words.of("welcome.lead"));
+        lead.getStyleClass().add("sl-lead");
+        lead.setWrapText(true);
+        VBox title = new VBox(6, name, lead);
+        title.setMaxWidth(WIDTH);
+        return title;
+    }
+
+    private Node fault() {
+        fault.setId("open-fault");
+        fault.setWrapText(true);
+        fault.setMaxWidth(WIDTH);
+        fault.getStyleClass().add("sl-fault");
+        model.state().addListener((state, before, after) -> showFault(after));
+        showFault(model.state().get());
+        return fault;
+    }
+
+    private void showFault(PaneState state) {
+        boolean failed = state.phase() == PaneState.Phase.FAILED;
+        fault.setText(failed ? Words.of("open.failed", state.words()) : "");
+        fault.setVisible(failed);
+        fault.setManaged(failed);
+    }
+
+    private Node columns() {
+        VBox left = new VBox(24, section("welcome.samples", model.samples(), "welcome.samples.none"), dropPlace());
+        VBox right = section("welcome.recent", model.recent(), "welcome.recent.none");
+        HBox columns = new HBox(left, right);
+        columns.getStyleClass().add("sl-welcome-columns");
+        columns.setMaxWidth(WIDTH);
+        for (VBox column : java.util.List.of(left, right)) {
+            HBox.setHgrow(column, Priority.ALWAYS);
+            column.setPrefWidth(WIDTH / 2);
+            column.setMinWidth(300);
+        }
+        return columns;
+    }
+
+    private VBox section(String heading, ObservableList<Place> places, String none) {
+        Label title = new Label(Words.of(heading));
+        title.getStyleClass().add("sl-heading");
+        VBox cards = new VBox(10);
+        cards.setId(heading.replace('.', '-'));
+        Runnable fill = () -> {
+            Label nothing = new Label(Words.of(none));
+            nothing.getStyleClass().add("sl-muted");
+            nothing.setWrapText(true);
+            cards.getChildren().setAll(places.stream().map(this::card).toList());
+            if (places.isEmpty()) {
+                cards.getChildren().setAll(nothing);
+            }
+        };
+        places.addListener((ListChangeListener<Place>) change -> fill.run());
+        fill.run();
+        return new VBox(12, title, cards);
+    }
+
+    private Button card(Place place) {
+        Button card = new Button();
+        Label title = new Label(place.title());
+        title.getStyleClass().add("sl-name");
+        VBox words = new VBox(3, title);
+        if (!place.lead().isEmpty()) {
+            Label lead = new Label(place.lead());
+            lead.setMaxWidth(CARD_WIDTH);
+            card.setTooltip(new Tooltip(place.lead()));
+            words.getChildren().add(lead);
+        }
+        Label where = new Label(place.folder().toString());
+        where.getStyleClass().add("sl-small");
+        words.getChildren().add(where);
+        card.setGraphic(words);
+        card.setAccessibleText(place.title());
+        card.getStyleClass().setAll("sl-card");
+        card.setMaxWidth(Double.MAX_VALUE);
+        words.setPrefWidth(CARD_WIDTH);
+        card.setOnAction(pressed -> model.open(place.folder()));
+        return card;
+    }
+
+    private Node dropPlace() {
+        Label words = new Label(Words.of("welcome.drop"));
+        words.getStyleClass().add("sl-muted");
+        Button choose = new Button(Words.of("welcome.choose"));
+        choose.setId("choose-folder");
+        choose.setDefaultButton(true);
+        choose.setOnAction(pressed -> model.choose());
+        drop.getStyleClass().add("sl-drop");
+        drop.getChildren().addAll(words, choose);
+        return drop;
+    }
+
+    private void onDragOver(DragEvent drag) {
+        if (drag.getDragboard().hasFiles()) {
+            drag.acceptTransferModes(TransferMode.COPY, TransferMode.LINK);
+            if (!drop.getStyleClass().contains("over")) {
+                drop.getStyleClass().add("over");
+            }
+        }
+        drag.consume();
+    }
+
+    private void onDropped(DragEvent drag) {
+        drop.getStyleClass().remove("over");
+        model.drop(drag.getDragboard().getFiles().stream().map(File::toPath).toList());
+        drag.setDropCompleted(true);
+        drag.consume();
+    }
+}

@@ -1,0 +1,341 @@
+package org.seepledger.job;
+
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.concurrent.locks.ReadWriteLock;
+import java.util.concurrent.locks.ReentrantReadWriteLock;
+import java.util.function.Consumer;
+import java.util.function.Function;
+import org.seepledger.aquifer.Aquifer;
+import org.seepledger.aquifer.KeptCells;
+import org.seepledger.aquifer.Window;
+import org.seepledger.balance.Balance;
+import org.seepledger.balance.Periods;
+import org.seepledger.balance.Span;
+import org.seepledger.balance.WaterBalance;
+import org.seepledger.balance.WellRule;
+import org.seepledger.fault.UsageFault;
+import org.seepledger.io.DataFolder;
+import org.seepledger.io.aquifer.AquiferFolder;
+import org.seepledger.io.aquifer.AquiferReader;
+import org.seepledger.io.crs.PlanCrs;
+import org.seepledger.io.prisms.DrawingReader;
+import org.seepledger.io.prisms.DrawingWriter;
+import org.seepledger.io.prisms.PrismsReader;
+import org.seepledger.io.prisms.SurfaceRasters;
+import org.seepledger.io.result.Provenance;
+import org.seepledger.io.result.ResultUnits;
+import org.seepledger.ledger.Period;
+import org.seepledger.ledger.PeriodBudget;
+import org.seepledger.prism.Prism;
+import org.seepledger.progress.Cancelled;
+import org.seepledger.progress.Progress;
+import org.seepledger.sketch.Drawing;
+import org.seepledger.unit.Measure;
+
+/**
+ * An aquifer folder kept open, for many questions about it: budgets of prisms that change, and what a map shows.
+ *
+ * <p>Questions may come from any thread and many at once. An answer depends on the question alone, not on what was asked
+ * before; budgets are those that {@link BalanceJob} makes of the same prisms, digit for digit. A question can be stopped
+ * through its progress; closing stops all.
+ */
+public final class Workbench implements AutoCloseable {
+
+    private static final long MOST_KEPT_BYTES = 512L << 20;
+
+    private final AquiferFolder folder;
+    private final SurfaceRasters surfaces;
+    private final KeptCells kept;
+    private final ReadWriteLock open = new ReentrantReadWriteLock();
+    private volatile boolean closed;
+
+    private Workbench(AquiferFolder folder) {
+        this.folder = folder;
+        this.surfaces = new SurfaceRasters(folder.aquifer().grid(), note -> {});
+        long memory = Runtime.getRuntime().maxMemory() / 4;
+        this.kept = new KeptCells(folder.aquifer(), Math.min(MOST_KEPT_BYTES, memory));
+    }
+
+    /**
+     * Opens an aquifer folder.
+     *
+     * @param folder the folder
+     * @return it, to be closed
+     * @throws org.seepledger.fault.DataFault if something is wrong with it
+     */
+    public static Workbench open(Path folder) {
+        return new Workbench(AquiferReader.open(folder));
+    }
+
+    /**
+     * {@return the aquifer}
+     */
+    public Aquifer aquifer() {
+        return folder.aquifer();
+    }
+
+    /**
+     * {@return its plan coordinate system}
+     */
+    public PlanCrs crs() {
+        return folder.crs();
+    }
+
+    /**
+     * {@return what the reader of any result must know}
+     */
+    public List<String> warnings() {
+        return folder.warnings();
+    }
+
+    /**
+     * {@return lesser remarks}
+     */
+    public List<String> notes() {
+        return folder.notes();
+    }
+
+    /**
+     * {@return what the set states of where its terms come from: of flow, of storage if there is any, then of each source}
+     */
+    public List<Provenance> origins() {
+        return folder.origins();
+    }
+
+    /**
+     * {@return the periods of its record}
+     *
+     * @param every how often a budget is struck
+     * @param waterYearStart the month in which a water year begins, 1 to 12
+     * @throws org.seepledger.fault.DataFault if calendar periods are asked for and the set has no start date
+     */
+    public List<Period> periods(Periods.Every every, int waterYearStart) {
+        return new Periods(aquifer().times()).every(every, waterYearStart);
+    }
+
+    /**
+     * {@return the units of results}
+     *
+     * @param rate the unit of rates; empty for the set's own
+     * @param volume the unit of volumes; empty for the set's own
+     * @throws UsageFault if one of them does not measure that
+     */
+    public ResultUnits units(Optional<Measure> rate, Optional<Measure> volume) {
+        return Subject.units(aquifer(), rate, volume);
+    }
+
+    /**
+     * {@return the prisms of a file as they stand there, even beyond the grid; the rasters that they name stay open as long as the workbench}
+     *
+     * @param file a GeoJSON file
+     * @throws org.seepledger.fault.DataFault if anything in it is wrong
+     */
+    public PrismsFile read(Path file) {
+        return ask(Progress.NONE, progress -> {
+            List<String> notes = new ArrayList<>();
+            synchronized (surfaces) {
+                return new PrismsFile(reader(notes::add).asDrawn(file, file.toString()), notes);
+            }
+        });
+    }
+
+    /**
+     * {@return the drawing that a file holds, to go on with it, and the surfaces that it names; their rasters stay open as
+     * long as the workbench}
+     *
+     * @param file a GeoJSON file
+     * @throws org.seepledger.fault.DataFault if it is damaged, or a surface cannot be read
+     */
+    public DrawingFile drawing(Path file) {
+        return ask(Progress.NONE, progress -> {
+            List<String> notes = new ArrayList<>();
+            String shown = file.toString();
+            Drawing drawing = new DrawingReader(crs(), aquifer().layers().size(), notes::add).read(file, shown);
+            synchronized (surfaces) {
+                return DrawingFile.of(drawing, DataFolder.holding(file, shown), surfaces, notes);
+            }
+        });
+    }
+
+    /**
+     * Writes a drawing; the file appears whole or not at all.
+     *
+     * @param file the file, which is replaced if it exists
+     * @param drawing the drawing
+     * @throws UsageFault if it cannot be written
+     */
+    public void write(Path file, Drawing drawing) {
+        Optional<String> named =
+                crs().isLocal() ? Optional.empty() : crs().code().or(() -> Optional.of(crs().wkt()));
+        DrawingWriter.write(file, named, drawing);
+    }
+
+    private PrismsReader reader(Consumer<String> notes) {
+        int layers = aquifer().layers().size();
+        return new PrismsReader(folder.crs(), aquifer().grid(), layers, true, surfaces, notes, notes);
+    }
+
+    /**
+     * Strikes the budgets of prisms in one interval, each prism by itself. Quick for a prism that was asked about before and
+     * has moved a little.
+     *
+     * @param prisms the prisms; what lies beyond the grid is cut off
+     * @param interval the interval, from 0
+     * @param progress told how far the work is
+     * @return their budgets, in their order
+     * @throws org.seepledger.fault.DataFault if a prism is no polygon or lies off the grid, or the data are wrong
+     * @throws Cancelled if the work was stopped
+     */
+    public List<IntervalBudget> budgets(List<Prism> prisms, int interval, Progress progress) {
+        return ask(progress, until -> {
+            List<IntervalBudget> budgets = new ArrayList<>();
+            for (Prism prism : prisms) {
+                budgets.add(budget(prism, interval, until));
+            }
+            return budgets;
+        });
+    }
+
+    private IntervalBudget budget(Prism prism, int interval, Progress progress) {
+        List<String> notes = new ArrayList<>();
+        List<Prism> admitted = List.of(reader(notes::add).admitted(prism));
+        Balance balance =
+                WaterBalance.of(aquifer(), kept::around, Span.only(interval), admitted, WellRule.POINT, 1, progress);
+        Period period = periods(Periods.Every.INTERVAL, 1).get(interval);
+        PeriodBudget budget = balance.ledgers().get(0).budget(period);
+        double area = balance.cuts().get(0).area();
+        return new IntervalBudget(
+                prism, area, interval, budget, balance.whereabouts().get(0), notes);
+    }
+
+    /**
+     * Balances prisms over the whole record, with what they give to each other.
+     *
+     * @param prisms at least one prism; what lies beyond the grid is cut off
+     * @param progress told how far the work is
+     * @return the balance
+     * @throws org.seepledger.fault.DataFault if a prism is no polygon or lies off the grid, or the data are wrong
+     * @throws Cancelled if the work was stopped
+     */
+    public RecordBudget record(List<Prism> prisms, Progress progress) {
+        return ask(progress, until -> {
+            List<String> notes = new ArrayList<>();
+            PrismsReader reader = reader(notes::add);
+            List<Prism> admitted = prisms.stream().map(reader::admitted).toList();
+            Balance balance = WaterBalance.of(aquifer(), admitted, WellRule.POINT, threads(), until);
+            Period whole = new Periods(aquifer().times()).record();
+            List<PeriodBudget> records = balance.ledgers().stream()
+                    .map(ledger -> ledger.budget(whole))
+                    .toList();
+            RunWarnings words = new RunWarnings(aquifer(), balance.notes());
+            notes.addAll(words.remarks(WellRule.POINT));
+            return new RecordBudget(prisms, balance, words.warnings(records), notes);
+        });
+    }
+
+    /**
+     * {@return what a map can show of the set}
+     *
+     * @throws Cancelled if the workbench was closed
+     */
+    public List<MapQuantity> quantities() {
+        stopIfClosed();
+        return new LayerReading(aquifer(), Progress.NONE).quantities();
+    }
+
+    /**
+     * Reads what a map shows of one layer.
+     *
+     * @param quantity one of {@link #quantities()}
+     * @param layer the layer, from 0
+     * @param interval the interval, from 0
+     * @param window the cells
+     * @param stride how many cells make one value along each side, at least 1
+     * @param progress told how far the work is
+     * @return the values
+     * @throws org.seepledger.fault.DataFault if the data are wrong
+     * @throws Cancelled if the work was stopped
+     */
+    public GridLayer layer(
+            MapQuantity quantity, int layer, int interval, Window window, int stride, Progress progress) {
+        return ask(
+                progress, until -> new LayerReading(aquifer(), until).layer(quantity, layer, interval, window, stride));
+    }
+
+    /**
+     * Reads horizontal flux for arrows on a map.
+     *
+     * @param layer the layer, from 0
+     * @param interval the interval, from 0
+     * @param window the cells
+     * @param stride how many cells make one arrow along each side, at least 1
+     * @param progress told how far the work is
+     * @return the field
+     * @throws org.seepledger.fault.DataFault if the data are wrong
+     * @throws Cancelled if the work was stopped
+     */
+    public FluxField flux(int layer, int interval, Window window, int stride, Progress progress) {
+        return ask(progress, until -> new LayerReading(aquifer(), until).flux(layer, interval, window, stride));
+    }
+
+    /**
+     * {@return the wells, in the order in which the set names them}
+     *
+     * @param interval the interval that rates are for, from 0
+     */
+    public List<WellPlace> wells(int interval) {
+        return WellPlace.of(aquifer(), interval);
+    }
+
+    private static int threads() {
+        return Math.max(1, Runtime.getRuntime().availableProcessors() - 1);
+    }
+
+    private <T> T ask(Progress progress, Function<Progress, T> question) {
+        open.readLock().lock();
+        try {
+            stopIfClosed();
+            return question.apply(untilClosed(progress));
+        } finally {
+            open.readLock().unlock();
+        }
+    }
+
+    private Progress untilClosed(Progress progress) {
+        return new Progress() {
+            @Override
+            public void begin(String what, long steps) {
+                stopIfClosed();
+                progress.begin(what, steps);
+            }
+
+            @Override
+            public void step() {
+                stopIfClosed();
+                progress.step();
+            }
+        };
+    }
+
+    private void stopIfClosed() {
+        if (closed) {
+            throw new Cancelled();
+        }
+    }
+
+    /** Stops all questions and closes the set's files. */
+    @Override
+    public void close() {
+        closed = true;
+        open.writeLock().lock();
+        try {
+            surfaces.close();
+            folder.close();
+        } finally {
+            open.writeLock().unlock();
+        }
+    }
+}

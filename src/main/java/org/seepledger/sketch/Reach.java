@@ -1,0 +1,77 @@
+package org.seepledger.sketch;
+
+import java.util.Optional;
+import org.seepledger.aquifer.GriddedValues;
+import org.seepledger.prism.VerticalRange;
+
+/** How far a prism reaches up and down, as it was typed. */
+public sealed interface Reach {
+
+    /** Nothing was typed: all layers. */
+    record Whole() implements Reach {}
+
+    /**
+     * A stack of whole layers.
+     *
+     * @param first the uppermost, from 0
+     * @param last the lowest
+     */
+    record Layers(int first, int last) implements Reach {
+
+        /** Refuses a stack that is upside down. */
+        public Layers {
+            if (first < 0 || last < first) {
+                throw new Refusal("Layers count from 1 downward, the upper one first.");
+            }
+        }
+    }
+
+    /**
+     * Between two elevations or surfaces.
+     *
+     * @param top the upper one; empty for the grid's own
+     * @param bottom the lower one; empty for the grid's own
+     */
+    record Between(Optional<Limit> top, Optional<Limit> bottom) implements Reach {
+
+        /** Refuses two elevations the wrong way round, and neither. */
+        public Between {
+            if (top.isEmpty() && bottom.isEmpty()) {
+                throw new Refusal("Give a top or a bottom, or layers.");
+            }
+            if (top.orElse(null) instanceof Limit.Elevation upper
+                    && bottom.orElse(null) instanceof Limit.Elevation lower
+                    && !(upper.height() > lower.height())) {
+                throw new Refusal("The top lies above the bottom.");
+            }
+        }
+    }
+
+    /**
+     * {@return the range of a prism on a grid}
+     *
+     * @param layers how many layers the grid has
+     * @param surfaces gives the surfaces that are named
+     * @throws Refusal if the grid has no such layer
+     */
+    default VerticalRange on(int layers, Surfaces surfaces) {
+        if (this instanceof Between between) {
+            return new VerticalRange.Elevations(
+                    between.top().map(limit -> values(limit, "top", surfaces)),
+                    between.bottom().map(limit -> values(limit, "bottom", surfaces)));
+        }
+        if (this instanceof Layers stack) {
+            if (stack.last() >= layers) {
+                throw new Refusal("The grid has " + layers + (layers == 1 ? " layer." : " layers."));
+            }
+            return new VerticalRange.Layers(stack.first(), stack.last());
+        }
+        return new VerticalRange.Layers(0, layers - 1);
+    }
+
+    private static GriddedValues values(Limit limit, String lid, Surfaces surfaces) {
+        return limit instanceof Limit.Elevation elevation
+                ? GriddedValues.constant(elevation.height())
+                : surfaces.read((Limit.Surface) limit, lid);
+    }
+}

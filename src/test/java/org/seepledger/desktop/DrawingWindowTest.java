@@ -1,0 +1,206 @@
+package org.seepledger.desktop;
+
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
+
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.stream.Collectors;
+import javafx.geometry.Bounds;
+import javafx.geometry.Point2D;
+import javafx.scene.Node;
+import javafx.scene.control.Label;
+import javafx.scene.input.KeyCode;
+import javafx.scene.input.MouseButton;
+import org.junit.jupiter.api.AfterEach;
+import org.junit.jupiter.api.BeforeEach;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import org.seepledger.balance.Periods;
+import org.seepledger.balance.WaterBalance;
+import org.seepledger.balance.WellRule;
+import org.seepledger.desktop.map.Camera;
+import org.seepledger.desktop.session.FaceFlows;
+import org.seepledger.desktop.session.Opening;
+import org.seepledger.job.Workbench;
+import org.seepledger.ledger.Group;
+import org.seepledger.ledger.PeriodBudget;
+import org.seepledger.prism.Prism;
+import org.seepledger.progress.Progress;
+import org.seepledger.sketch.Drawing;
+import org.seepledger.sketch.Place;
+import org.seepledger.sketch.RingAt;
+
+/** Draws by hand over the sample, with the mouse and keyboard of the real window. */
+class DrawingWindowTest {
+
+    @TempDir
+    private Path folder;
+
+    private OpenWindow window;
+
+    @BeforeEach
+    void open() throws IOException {
+        try (var sample = Files.list(Path.of("sample-aquifers/valley"))) {
+            for (Path file : sample.toList()) {
+                Files.copy(file, folder.resolve(file.getFileName()));
+            }
+        }
+        window = new OpenWindow(1600, 1000);
+        openSet();
+    }
+
+    private void openSet() {
+        window.openSet(folder);
+        window.await(() -> window.assembly().map().values().scale().get().isPresent());
+        window.settle();
+    }
+
+    @AfterEach
+    void close() {
+        window.close();
+    }
+
+    private Point2D at(double mapX, double mapY) {
+        Node canvas = window.robot.lookup("#map-canvas").query();
+        Bounds bounds = canvas.localToScreen(canvas.getBoundsInLocal());
+        Camera camera = window.assembly().map().camera().get();
+        return new Point2D(bounds.getMinX() + camera.x(mapX), bounds.getMinY() + camera.y(mapY));
+    }
+
+    private void type(KeyCode... keys) {
+        window.robot.press(keys).release(keys);
+    }
+
+    private Drawing drawing() {
+        return window.assembly().draft().drawing();
+    }
+
+    private void drawPrism() {
+        window.robot.clickOn("#tool-polygon");
+        window.robot.clickOn(at(501850, 5200250));
+        window.robot.clickOn(at(502310, 5200280));
+        window.robot.clickOn(at(502290, 5200700));
+        window.robot.doubleClickOn(at(501880, 5200660));
+    }
+
+    @Test
+    void aPrismDrawnByHandHasTheBudgetThatTheCommandGivesForItsFileDigitForDigit() {
+        drawPrism();
+        assertThat(drawing().outline(RingAt.outer("prism")).size()).isEqualTo(4);
+        assertThat(window.robot.lookup("#status").queryAs(Label.class).getText())
+                .contains("Click a prism");
+        window.await(() -> window.assembly().session().faceFlows().get().prism().equals("prism"));
+        FaceFlows shown = window.assembly().session().faceFlows().get();
+        Path file = folder.resolve("drawn.geojson");
+        window.answers.paths.add(Optional.of(file));
+        type(KeyCode.CONTROL, KeyCode.SHIFT, KeyCode.S);
+        window.await(() -> Files.exists(file));
+        try (Workbench bench = Workbench.open(folder)) {
+            Prism prism = bench.read(file).prisms().get(4);
+            assertThat(window.assembly().session().selectedPrism()).contains(prism);
+            Map<String, Double> expected = bySide(bench, prism);
+            assertThat(shown.net().keySet()).isEqualTo(expected.keySet());
+            expected.forEach((side, net) ->
+                    assertThat(shown.net().get(side)).as(side).isCloseTo(net, within(1e-12 * Math.abs(net))));
+        }
+    }
+
+    /** Net rates of the first interval as the command strikes them; layers are added up in another order here. */
+    private static Map<String, Double> bySide(Workbench bench, Prism prism) {
+        PeriodBudget budget = WaterBalance.of(bench.aquifer(), List.of(prism), WellRule.POINT, 1, Progress.NONE)
+                .ledgers()
+                .get(0)
+                .budget(new Periods(bench.aquifer().times())
+                        .every(Periods.Every.INTERVAL, 1)
+                        .get(0));
+        double length = bench.aquifer().times().length(0);
+        return budget.entries().stream()
+                .filter(entry -> entry.account().group() == Group.SIDE)
+                .collect(Collectors.groupingBy(
+                        entry -> entry.account().item(), Collectors.summingDouble(entry -> entry.net() / length)));
+    }
+
+    @Test
+    void aVertexIsDraggedUndoneAndDoneAgain() {
+        Drawing before = drawing();
+        Place from = before.outline(RingAt.outer("well field")).place(7);
+        window.robot
+                .drag(at(from.x(), from.y()), MouseButton.PRIMARY)
+                .moveTo(at(from.x() - 150, from.y() + 120))
+                .drop();
+        Place moved = drawing().outline(RingAt.outer("well field")).place(7);
+        double pixel = 1 / window.assembly().map().camera().get().scale();
+        assertThat(moved.x()).isCloseTo(from.x() - 150, within(13 * pixel));
+        assertThat(moved).isNotEqualTo(from);
+        long revision = window.assembly().session().drawing().get().revision();
+        window.await(() -> window.assembly().session().faceFlows().get().revision() == revision);
+        type(KeyCode.CONTROL, KeyCode.Z);
+        assertThat(drawing()).isSameAs(before);
+        type(KeyCode.CONTROL, KeyCode.SHIFT, KeyCode.Z);
+        assertThat(drawing().outline(RingAt.outer("well field")).place(7)).isEqualTo(moved);
+    }
+
+    @Test
+    void islandAndSplitAreDrawnAndUndoneToTheStart() {
+        Drawing first = drawing();
+        window.robot.press(KeyCode.I).release(KeyCode.I);
+        window.robot.clickOn(at(501380, 5201480));
+        window.robot.clickOn(at(501540, 5201480));
+        window.robot.clickOn(at(501460, 5201620));
+        type(KeyCode.ENTER);
+        assertThat(drawing().shape("well field").parts().get(0).islands()).hasSize(2);
+        window.robot.clickOn(at(500900, 5200600));
+        assertThat(window.assembly().session().selected().get()).isEqualTo("south terrace");
+        type(KeyCode.X);
+        window.robot.clickOn(at(500990, 5200140));
+        window.robot.doubleClickOn(at(500960, 5201010));
+        assertThat(drawing().shapes()).hasSize(5);
+        type(KeyCode.CONTROL, KeyCode.Z);
+        type(KeyCode.CONTROL, KeyCode.Z);
+        assertThat(drawing()).isSameAs(first);
+        type(KeyCode.CONTROL, KeyCode.SHIFT, KeyCode.Z);
+        type(KeyCode.CONTROL, KeyCode.SHIFT, KeyCode.Z);
+        assertThat(drawing().shapes()).hasSize(5);
+    }
+
+    @Test
+    void whatWasDrawnIsThereAgainAfterTheProgramWasKilled() {
+        drawPrism();
+        window.await(() -> Files.exists(folder.resolve(Opening.UNSAVED)));
+        Drawing drawn = drawing();
+        window.close();
+        window = new OpenWindow(1600, 1000);
+        openSet();
+        assertThat(drawing()).isEqualTo(drawn);
+        assertThat(window.robot.lookup("#status").queryAs(Label.class).getText())
+                .contains("are back");
+    }
+
+    @Test
+    void theCardTakesANameAndLayersByTyping() {
+        type(KeyCode.F8);
+        window.robot.clickOn("#card-layers").press(KeyCode.CONTROL, KeyCode.A).release(KeyCode.A, KeyCode.CONTROL);
+        window.robot.write("1");
+        type(KeyCode.ENTER);
+        assertThat(window.assembly().draft().selected().orElseThrow().reach())
+                .isEqualTo(new org.seepledger.sketch.Reach.Layers(0, 0));
+        window.robot.clickOn("#card-name").press(KeyCode.CONTROL, KeyCode.A).release(KeyCode.A, KeyCode.CONTROL);
+        window.robot.write("zone");
+        type(KeyCode.ENTER);
+        assertThat(window.assembly().session().selected().get()).isEqualTo("zone");
+    }
+
+    @Test
+    void openingAnotherSetAsksAboutUnsavedPrisms() {
+        drawPrism();
+        window.answers.answers.add(Optional.of(2));
+        window.robot.interact(() -> window.assembly().welcome().open(Path.of("sample-aquifers/terrace")));
+        assertThat(window.answers.asked).anyMatch(question -> question.contains("have changed"));
+        assertThat(window.assembly().session().set().get().orElseThrow().path()).isEqualTo(folder);
+    }
+}

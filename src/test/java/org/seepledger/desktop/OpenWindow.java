@@ -1,0 +1,91 @@
+package org.seepledger.desktop;
+
+import java.nio.file.Path;
+import java.util.List;
+import java.util.concurrent.Callable;
+import java.util.concurrent.TimeUnit;
+import java.util.function.BooleanSupplier;
+import javafx.application.Platform;
+import javafx.stage.Stage;
+import org.seepledger.desktop.port.GivenAnswers;
+import org.seepledger.desktop.task.BackgroundTasks;
+import org.testfx.api.FxRobot;
+import org.testfx.api.FxToolkit;
+import org.testfx.util.WaitForAsyncUtils;
+
+/** The real window on a screen in memory, with a robot at its mouse and keyboard. */
+public final class OpenWindow implements AutoCloseable {
+
+    private static final int PATIENCE_SECONDS = 20;
+
+    /** The mouse and keyboard. */
+    public final FxRobot robot = new FxRobot();
+
+    /** What the machine answers. */
+    public final GivenAnswers answers = new GivenAnswers();
+
+    private final BackgroundTasks tasks = new BackgroundTasks(Platform::runLater);
+    private Assembly assembly;
+    private Stage stage;
+
+    /**
+     * Opens the window.
+     *
+     * @param width of the scene, in logical pixels
+     * @param height of the scene, in logical pixels
+     */
+    public OpenWindow(double width, double height) {
+        try {
+            stage = FxToolkit.registerPrimaryStage();
+            FxToolkit.setupFixture(() -> {
+                assembly = new Assembly(
+                        new Assembly.Outside(tasks, answers, answers, answers, answers), List.of(Path.of("")));
+                stage.setScene(assembly.scene());
+                stage.setX(0);
+                stage.setY(0);
+                stage.setWidth(width);
+                stage.setHeight(height);
+                stage.show();
+            });
+        } catch (java.util.concurrent.TimeoutException e) {
+            throw new IllegalStateException(e);
+        }
+    }
+
+    /** Opens a set and waits until it is there. */
+    public void openSet(Path folder) {
+        robot.interact(() -> assembly.welcome().open(folder));
+        await(() -> assembly.session().set().get().isPresent());
+    }
+
+    /** Waits until something holds. */
+    public void await(BooleanSupplier condition) {
+        try {
+            WaitForAsyncUtils.waitFor(PATIENCE_SECONDS, TimeUnit.SECONDS, (Callable<Boolean>)
+                    () -> WaitForAsyncUtils.asyncFx(condition::getAsBoolean).get());
+        } catch (java.util.concurrent.TimeoutException e) {
+            throw new AssertionError("waited in vain", e);
+        }
+        WaitForAsyncUtils.waitForFxEvents();
+    }
+
+    /** Lets the window come to rest. */
+    void settle() {
+        WaitForAsyncUtils.sleep(350, TimeUnit.MILLISECONDS);
+        WaitForAsyncUtils.waitForFxEvents();
+    }
+
+    Assembly assembly() {
+        return assembly;
+    }
+
+    Stage stage() {
+        return stage;
+    }
+
+    @Override
+    public void close() {
+        robot.interact(() -> stage.hide());
+        tasks.close();
+    }
+}

@@ -1,0 +1,74 @@
+package org.seepledger.desktop;
+
+import java.awt.image.BufferedImage;
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import javafx.scene.image.Image;
+import javafx.scene.image.PixelFormat;
+import javax.imageio.ImageIO;
+import org.seepledger.desktop.theme.Theme;
+
+/** Writes pictures of each view, light and dark, in two sizes, into the folder given. */
+public final class Screenshots {
+
+    private Screenshots() {}
+
+    /**
+     * Writes the pictures.
+     *
+     * @param arguments the folder
+     * @throws IOException if a picture cannot be written
+     */
+    public static void main(String[] arguments) throws IOException {
+        Path folder = Files.createDirectories(Path.of(arguments[0]));
+        for (int[] size : new int[][] {{1280, 800}, {1920, 1080}}) {
+            try (OpenWindow window = new OpenWindow(size[0], size[1])) {
+                String suffix = "-" + size[0] + "x" + size[1] + ".png";
+                window.await(() -> !window.assembly().welcome().samples().isEmpty());
+                both(window, folder, "welcome", suffix);
+                window.openSet(Path.of("sample-aquifers/valley"));
+                window.settle();
+                window.settle();
+                both(window, folder, "map", suffix);
+                for (String page : new String[] {"answers", "exchange", "ledger"}) {
+                    window.robot.clickOn("#folio-" + page);
+                    both(window, folder, page, suffix);
+                }
+                window.robot.interact(() -> {
+                    window.assembly().map().showPrism();
+                    window.assembly().tray().flipCard();
+                });
+                window.robot.press(javafx.scene.input.KeyCode.TAB).release(javafx.scene.input.KeyCode.TAB);
+                window.settle();
+                both(window, folder, "draw", suffix);
+                window.robot.interact(() -> window.assembly().tray().flipCard());
+                window.robot.press(javafx.scene.input.KeyCode.F1).release(javafx.scene.input.KeyCode.F1);
+                window.settle();
+                both(window, folder, "actions", suffix);
+            }
+        }
+        System.exit(0);
+    }
+
+    private static void both(OpenWindow window, Path folder, String name, String suffix) throws IOException {
+        for (Theme theme : Theme.values()) {
+            window.robot.interact(() -> window.assembly().shell().theme().set(theme));
+            window.settle();
+            String lit = theme.name().toLowerCase(java.util.Locale.ROOT);
+            write(window, folder.resolve(name + "-" + lit + suffix));
+        }
+    }
+
+    private static void write(OpenWindow window, Path file) throws IOException {
+        Image[] taken = new Image[1];
+        window.robot.interact(() -> taken[0] = window.stage().getScene().snapshot(null));
+        int width = (int) taken[0].getWidth();
+        int height = (int) taken[0].getHeight();
+        int[] pixels = new int[width * height];
+        taken[0].getPixelReader().getPixels(0, 0, width, height, PixelFormat.getIntArgbInstance(), pixels, 0, width);
+        BufferedImage picture = new BufferedImage(width, height, BufferedImage.TYPE_INT_RGB);
+        picture.setRGB(0, 0, width, height, pixels, 0, width);
+        ImageIO.write(picture, "png", file.toFile());
+    }
+}

@@ -1,0 +1,58 @@
+package org.seepledger.desktop.budget;
+
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Optional;
+import org.seepledger.desktop.port.GivenAnswers;
+import org.seepledger.desktop.session.Drawing;
+import org.seepledger.desktop.session.OpenSet;
+import org.seepledger.desktop.session.Opening;
+import org.seepledger.desktop.session.Session;
+import org.seepledger.desktop.task.DirectTasks;
+import org.seepledger.prism.Prism;
+
+/** A sample with its prisms, the first selected, and its budgets worked out, as view models see them. */
+public final class LiveSet implements AutoCloseable {
+
+    /** What the window looks at. */
+    public final Session session = new Session();
+
+    /** How figures are read. */
+    public final Reading reading = new Reading(session);
+
+    /** The budgets. */
+    public final LiveBudget live = new LiveBudget(session, new DirectTasks());
+
+    /** Where copies go. */
+    public final GivenAnswers answers = new GivenAnswers();
+
+    /** The set. */
+    public final OpenSet set;
+
+    /** Its prisms. */
+    public final List<Prism> prisms;
+
+    private LiveSet(Path folder) {
+        Opening opening = Opening.of(folder);
+        set = opening.set();
+        prisms = set.workbench().read(set.path().resolve(Opening.PRISMS)).prisms();
+        session.show(Optional.of(set));
+        session.drawing().set(new Drawing(1, prisms, true));
+        session.selected().set(prisms.get(0).name());
+    }
+
+    /** The valley: 24 dated intervals, four prisms, storage known; it closes. */
+    public static LiveSet valley() {
+        return new LiveSet(Path.of("sample-aquifers/valley"));
+    }
+
+    /** The terrace: specific discharge at cell centres; it does not close. */
+    public static LiveSet terrace() {
+        return new LiveSet(Path.of("sample-aquifers/terrace"));
+    }
+
+    @Override
+    public void close() {
+        set.close();
+    }
+}

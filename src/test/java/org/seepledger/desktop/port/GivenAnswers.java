@@ -1,0 +1,75 @@
+package org.seepledger.desktop.port;
+
+import java.nio.file.Path;
+import java.util.ArrayDeque;
+import java.util.ArrayList;
+import java.util.Deque;
+import java.util.List;
+import java.util.Optional;
+
+/** A machine that answers what a test told it to, and keeps what it was given. */
+public final class GivenAnswers implements FileDialogs, CopyBoard, Questions, RecentFolders {
+
+    /** The answers to come, in order: paths for dialogs, numbers for questions. */
+    public final Deque<Optional<Path>> paths = new ArrayDeque<>();
+
+    /** The answers to questions, in order. */
+    public final Deque<Optional<Integer>> answers = new ArrayDeque<>();
+
+    /** What was asked. */
+    public final List<String> asked = new ArrayList<>();
+
+    /** What was copied: text or tab-separated lines, then HTML if there was any. */
+    public final List<String> copied = new ArrayList<>();
+
+    private final List<Path> recent = new ArrayList<>();
+
+    @Override
+    public Optional<Path> folder(String title) {
+        asked.add(title);
+        return paths.remove();
+    }
+
+    @Override
+    public Optional<Path> fileToRead(String title, Kind kind) {
+        return folder(title);
+    }
+
+    @Override
+    public Optional<Path> fileToWrite(String title, Kind kind, Path suggested) {
+        return folder(title);
+    }
+
+    @Override
+    public Optional<Integer> ask(String title, String question, List<String> choices) {
+        asked.add(question);
+        return answers.remove();
+    }
+
+    @Override
+    public void table(String tabSeparated, String html) {
+        copied.add(tabSeparated);
+        copied.add(html);
+    }
+
+    @Override
+    public void text(String text) {
+        copied.add(text);
+    }
+
+    @Override
+    public List<Path> list() {
+        return List.copyOf(recent);
+    }
+
+    @Override
+    public void remember(Path folder) {
+        recent.remove(folder);
+        recent.add(0, folder);
+    }
+
+    @Override
+    public void forget(Path folder) {
+        recent.remove(folder);
+    }
+}
