@@ -23,9 +23,9 @@ import picocli.CommandLine.Parameters;
         sortOptions = false,
         footer = {
             "",
-            "Example: yearly budgets in kilograms a year, with the volume above 50 mg/L.",
-            "  seepledger plume AQUIFER --prisms prisms.geojson --out plume \\",
-            "    --every year --rate-unit kg/yr --above \"50 mg/L\"",
+            "Example: the sample's yearly budgets in kilograms a year, with dispersion and the volume above 0.1 mg/L.",
+            "  seepledger plume sample-aquifers/depot --prisms sample-aquifers/depot/prisms.geojson \\",
+            "    --out plume --every year --rate-unit kg/yr --dispersion --above \"0.1 mg/L\"",
             "",
             "Written to DIR: plume.csv (the budget), mass.csv (what is there at each instant), trend.csv"
                     + " (where it goes and how it changes), transect.csv (what crosses lines), run.json (inputs, options, warnings).",
