@@ -71,7 +71,12 @@ class HelpTest {
     @Test
     void fitsTheTerminal() {
         for (String[] command : new String[][] {
-            {"--help"}, {"inspect", "--help"}, {"balance", "--help"}, {"trace", "--help"}, {"extract", "--help"}, {"plume", "--help"}
+            {"--help"},
+            {"inspect", "--help"},
+            {"balance", "--help"},
+            {"trace", "--help"},
+            {"extract", "--help"},
+            {"plume", "--help"}
         }) {
             assertThat(Ran.of(command).out().lines()).allMatch(line -> line.length() <= 100);
         }

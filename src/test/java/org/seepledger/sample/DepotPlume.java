@@ -54,8 +54,7 @@ final class DepotPlume {
         Step ofProduct = new Step(1);
         for (int interval = 0; interval < INTERVALS; interval++) {
             double[] added = new double[CELLS];
-            added[DepotFlow.LEAK_ROW * DepotFlow.COLUMNS + DepotFlow.LEAK_COLUMN] =
-                    DepotFlow.LEAK * leaked(interval);
+            added[DepotFlow.LEAK_ROW * DepotFlow.COLUMNS + DepotFlow.LEAK_COLUMN] = DepotFlow.LEAK * leaked(interval);
             double[] before = solvent.get(interval);
             double[] after = ofSolvent.from(before, added);
             double[] produced = new double[CELLS];

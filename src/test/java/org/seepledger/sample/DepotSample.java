@@ -100,7 +100,9 @@ public final class DepotSample {
             table.append(DepotFlow.ROWS - row).append(',').append(column + 1);
             table.append(',').append(Digits.significant(DepotFlow.east(column + 1, row), ALL_DIGITS));
             table.append(',').append(Digits.significant(DepotFlow.north(column, row + 1), ALL_DIGITS));
-            table.append(',').append(Digits.significant(DepotFlow.east(column, row), ALL_DIGITS)).append('\n');
+            table.append(',')
+                    .append(Digits.significant(DepotFlow.east(column, row), ALL_DIGITS))
+                    .append('\n');
         });
         return table.toString().replace("north,west", "north [m3/d],west [m3/d]");
     }
@@ -125,7 +127,11 @@ public final class DepotSample {
             int at = instant;
             eachCell((row, column) -> {
                 int cell = row * DepotFlow.COLUMNS + column;
-                table.append(DepotFlow.ROWS - row).append(',').append(column + 1).append(',').append(at);
+                table.append(DepotFlow.ROWS - row)
+                        .append(',')
+                        .append(column + 1)
+                        .append(',')
+                        .append(at);
                 for (List<double[]> substance : solved) {
                     double value = substance.get(at)[cell];
                     table.append(',').append(value < LIMIT ? "<0.002" : Digits.significant(value, 6));

@@ -44,8 +44,10 @@ class DepotSampleTest {
     void theEngineBooksWhatTheGeneratorMoved() {
         try (AquiferFolder folder = AquiferReader.open(COMMITTED)) {
             List<Solute> exact = List.of(
-                    withConcentration(folder.solutes().get(0), DepotPlume.solved().get(0)),
-                    withConcentration(folder.solutes().get(1), DepotPlume.solved().get(1)));
+                    withConcentration(
+                            folder.solutes().get(0), DepotPlume.solved().get(0)),
+                    withConcentration(
+                            folder.solutes().get(1), DepotPlume.solved().get(1)));
             List<Plume> plumes = SoluteBalance.of(
                     folder.aquifer(),
                     exact,
@@ -111,7 +113,14 @@ class DepotSampleTest {
             List<Plume> plumes = SoluteBalance.of(
                     folder.aquifer(),
                     folder.solutes(),
-                    new PrismsReader(folder.crs(), folder.aquifer().grid(), 1, false, (name, place) -> null, note -> {}, warning -> {})
+                    new PrismsReader(
+                                    folder.crs(),
+                                    folder.aquifer().grid(),
+                                    1,
+                                    false,
+                                    (name, place) -> null,
+                                    note -> {},
+                                    warning -> {})
                             .read(file, "prisms.geojson"),
                     new SoluteBalance.Options(WellRule.POINT, true, OptionalDouble.empty(), 1),
                     Progress.NONE);

@@ -212,7 +212,10 @@ final class SolutesReader {
             JsonNode concentrations = sources.get(i).path("concentration");
             String category = sources.get(i).get("category").textValue();
             SoluteNode node = new SoluteNode(
-                    concentrations, KeyPlace.key(KeyPlace.entry("sources", i), "concentration"), "\"" + category + "\"", bindings);
+                    concentrations,
+                    KeyPlace.key(KeyPlace.entry("sources", i), "concentration"),
+                    "\"" + category + "\"",
+                    bindings);
             int source = i;
             node.values(name, unit, massPerLength3, StepKind.INTERVAL, Bounds.NOT_NEGATIVE)
                     .ifPresent(values -> carried.put(source, values));
