@@ -122,7 +122,7 @@ public final class PlumeJob {
         subject.warnings().addAll(ofWater.warnings(records));
         subject.warnings().addAll(ofSolutes.warnings(plumes));
         subject.notes().addAll(ofWater.remarks(request.wells()));
-        subject.notes().addAll(ofSolutes.remarks(solutes));
+        subject.notes().addAll(ofSolutes.remarks(solutes, plumes));
         write(out, plumes, water);
         List<String> files = out.written();
         out.publish();

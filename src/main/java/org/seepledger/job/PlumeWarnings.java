@@ -125,8 +125,16 @@ final class PlumeWarnings {
     }
 
     /** Lesser remarks. */
-    List<String> remarks(List<Solute> solutes) {
+    List<String> remarks(List<Solute> solutes, List<Plume> plumes) {
         List<String> remarks = new ArrayList<>();
+        for (Plume plume : plumes) {
+            if (Double.isFinite(plume.doubts().shortestDispersivity())) {
+                remarks.add("The upstream rule spreads " + plume.solute().name()
+                        + " in \"" + plume.prism() + "\" like a longitudinal dispersivity of up to "
+                        + length(plume.doubts().widestHalfCell()) + " (half a cell); given is "
+                        + length(plume.doubts().shortestDispersivity()) + " or more.");
+            }
+        }
         for (Solute solute : solutes) {
             if (dispersion && solute.dispersion().isEmpty()) {
                 remarks.add("No dispersion is given for " + solute.name() + ": it is advected alone.");

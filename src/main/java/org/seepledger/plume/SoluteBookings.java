@@ -1,6 +1,5 @@
 package org.seepledger.plume;
 
-import java.util.List;
 import org.seepledger.aquifer.CellGeometry;
 import org.seepledger.aquifer.CellTerm;
 import org.seepledger.aquifer.Grid;
@@ -11,7 +10,6 @@ import org.seepledger.balance.Bookings;
 final class SoluteBookings implements Bookings {
 
     private static final int CHOICES = NonDetects.values().length;
-    private static final int HALF = NonDetects.HALF.ordinal();
 
     /** By what share more water than pores may drain before it counts: rounding. */
     private static final double ROUNDING = 1e-9;
@@ -157,14 +155,23 @@ final class SoluteBookings implements Bookings {
         }
         heldIn = layer;
         if (counting.start()) {
-            aboveBefore |= new Held(solute.start(), cell, area, bottom, before).count(tally.start(), aboveBefore);
+            aboveBefore |= held(cell, area, bottom, before).count(solute.start(), tally.start(), aboveBefore);
         }
-        aboveInColumn |= new Held(solute.end(), cell, area, bottom, after).count(tally.end(), aboveInColumn);
+        aboveInColumn |= held(cell, area, bottom, after).count(solute.end(), tally.end(), aboveInColumn);
         for (int choice = 0; choice < CHOICES; choice++) {
             bookRock(choice, cell, area * before, area * after);
         }
         addDoubts(cell);
         poresDrained = solute.matrix().dissolved(cell, 1) * area * (before - after);
+    }
+
+    private Holding held(int cell, double area, double bottom, double height) {
+        Grid grid = state.geometry().grid();
+        int fromSouth = grid.flipped(row);
+        double x = grid.x().edge(column) + 0.5 * grid.x().size(column);
+        double y = grid.y().edge(fromSouth) + 0.5 * grid.y().size(fromSouth);
+        double[] centre = {x, y, bottom + 0.5 * height};
+        return new Holding(solute.matrix(), cell, layer, area, height, centre, counting.above());
     }
 
     private void addDoubts(int cell) {
@@ -240,72 +247,6 @@ final class SoluteBookings implements Bookings {
         heldIn = -1;
         drained = 0;
         poresDrained = 0;
-    }
-
-    /** What a cell holds at an instant, as far as it lies in the prism. */
-    private final class Held {
-
-        private final Reading when;
-        private final int cell;
-        private final double area;
-        private final double bottom;
-        private final double height;
-
-        Held(Reading when, int cell, double area, double bottom, double height) {
-            this.when = when;
-            this.cell = cell;
-            this.area = area;
-            this.bottom = bottom;
-            this.height = height;
-        }
-
-        /**
-         * Counts it, and tells whether its concentration is above the one asked for.
-         *
-         * @param counted whether a cell above it in the column was, so that its plan area counts already
-         */
-        boolean count(List<Stock> stocks, boolean counted) {
-            if (height <= 0) {
-                return false;
-            }
-            Stock own = stocks.get(layer);
-            Stock all = stocks.get(stocks.size() - 1);
-            addMass(own);
-            addMass(all);
-            boolean above = when.needed(HALF, cell) > counting.above();
-            if (above) {
-                own.addAbove(area * height, area);
-                all.addAbove(area * height, counted ? 0 : area);
-            }
-            return above;
-        }
-
-        private void addMass(Stock stock) {
-            double rock = area * height;
-            double[] dissolved = new double[CHOICES];
-            double[] sorbed = new double[CHOICES];
-            for (int choice = 0; choice < CHOICES; choice++) {
-                double concentration = when.needed(choice, cell);
-                dissolved[choice] = rock * solute.matrix().dissolved(cell, concentration);
-                sorbed[choice] = rock * solute.matrix().sorbed(cell, concentration);
-            }
-            stock.add(rock, solute.matrix().dissolved(cell, 1), dissolved, sorbed, when.needed(HALF, cell), centre());
-            if (when.nonDetect()[cell]) {
-                stock.addNonDetect(dissolved[HALF] + sorbed[HALF], when.limits()[cell]);
-            } else {
-                stock.addDetect();
-            }
-        }
-
-        private double[] centre() {
-            Grid grid = state.geometry().grid();
-            int fromSouth = grid.flipped(row);
-            return new double[] {
-                grid.x().edge(column) + 0.5 * grid.x().size(column),
-                grid.y().edge(fromSouth) + 0.5 * grid.y().size(fromSouth),
-                bottom + 0.5 * height
-            };
-        }
     }
 
     @Override
