@@ -6,6 +6,7 @@ import static org.assertj.core.api.Assertions.within;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -93,16 +94,15 @@ class DepotSampleTest {
                 like.ofSources());
     }
 
-    /** Dispersion across the grid may undershoot, far below what is detected. */
+    /** Dispersion turned against the grid undershoots, by less than a thousandth of the peak; files say <0.002 there. */
     @Test
-    void nothingIsNegative() {
-        List<List<double[]>> solved = DepotPlume.solved();
-        for (List<double[]> substance : solved) {
-            for (double[] instant : substance) {
-                for (double value : instant) {
-                    assertThat(value).isGreaterThan(-2e-3);
-                }
-            }
+    void hardlyUndershoots() {
+        for (List<double[]> substance : DepotPlume.solved()) {
+            double least =
+                    substance.stream().flatMapToDouble(Arrays::stream).min().orElseThrow();
+            double peak =
+                    substance.stream().flatMapToDouble(Arrays::stream).max().orElseThrow();
+            assertThat(least).isGreaterThan(-1e-3 * peak);
         }
     }
 
