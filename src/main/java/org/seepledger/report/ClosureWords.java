@@ -3,7 +3,6 @@ package org.seepledger.report;
 import java.util.ArrayList;
 import java.util.List;
 import org.seepledger.ledger.Totals;
-import org.seepledger.unit.Figures;
 
 /** Whether a budget closes, in words. */
 final class ClosureWords {
@@ -37,9 +36,8 @@ final class ClosureWords {
         List<String> sentences = new ArrayList<>();
         sentences.add(overTheRecord());
         result.worstPeriod()
-                .ifPresent(worst -> sentences.add("Worst period: "
-                        + worst.period().name() + ", "
-                        + wording.percent(Figures.withoutRounding(worst.totals().closureError(), 100)) + "."));
+                .map(worst -> "Worst period: " + worst.period().name() + ", " + error(worst.totals().closureError()) + ".")
+                .ifPresent(sentences::add);
         return sentences;
     }
 
@@ -51,11 +49,20 @@ final class ClosureWords {
         if (totals.throughput() == 0) {
             return "Nothing flows: there is nothing to close.";
         }
-        return (result.closesToRounding() ? "Closes to rounding: closure error " : "Closure error ")
-                + wording.percent(Figures.withoutRounding(totals.closureError(), 100)) + " of throughput ("
-                + wording.percent(Figures.withoutRounding(totals.netClosureError(), 100)) + " of net flow): "
-                + wording.rate(Figures.withoutRounding(totals.residual(), totals.throughput()), time) + " of "
-                + wording.rate(totals.throughput(), time) + " is unexplained.";
+        String throughput = wording.rate(totals.throughput(), time);
+        if (result.closesToRounding()) {
+            return "Closes to rounding: " + error(totals.closureError()) + " of a throughput of " + throughput
+                    + " is unexplained.";
+        }
+        return "Closure error " + wording.percent(totals.closureError()) + " of throughput ("
+                + wording.percent(totals.netClosureError()) + " of net flow): "
+                + wording.rate(totals.residual(), time) + " of " + throughput + " is unexplained.";
+    }
+
+    /** A closure error, or that it is no more than rounding. */
+    private String error(double percent) {
+        double rounding = PrismResult.ROUNDING_PERCENT;
+        return Math.abs(percent) < rounding ? "less than " + wording.percent(rounding) : wording.percent(percent);
     }
 
     private void addThroughFlow(List<String> sentences) {

@@ -32,7 +32,7 @@ public record PrismResult(
         Whereabouts whereabouts) {
 
     /** Below this, in percent, a closure error is rounding and nothing else. */
-    private static final double ROUNDING_PERCENT = 1e-9;
+    static final double ROUNDING_PERCENT = 1e-9;
 
     /** Copies the lists. */
     public PrismResult {
@@ -78,9 +78,14 @@ public record PrismResult(
 
     /** {@return whether the residual over the record is rounding and nothing else; false where there is none} */
     public boolean closesToRounding() {
-        return storageKnown()
-                && (record.totals().throughput() == 0
-                        || Math.abs(record.totals().closureError()) < ROUNDING_PERCENT);
+        return closesToRounding(record);
+    }
+
+    /** {@return whether the residual of a budget is rounding and nothing else; false where there is none} */
+    static boolean closesToRounding(PeriodBudget budget) {
+        return !Double.isNaN(budget.totals().storageChange())
+                && (budget.totals().throughput() == 0
+                        || Math.abs(budget.totals().closureError()) < ROUNDING_PERCENT);
     }
 
     /** {@return the period with the largest closure error, where there is more than one period} */

@@ -48,7 +48,8 @@ public final class PanSpeed {
                 .set(window.assembly().map().values().quantities().stream()
                         .filter(each -> each.kind() == kind)
                         .findFirst()));
-        window.await(() -> window.assembly().map().values().state().get().words().isEmpty());
+        window.await(
+                () -> window.assembly().map().values().state().get().words().isEmpty());
         System.out.printf("%s in %.0f ms%n", kind, (System.nanoTime() - begin) / 1e6);
     }
 

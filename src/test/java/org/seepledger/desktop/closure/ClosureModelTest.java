@@ -14,7 +14,7 @@ class ClosureModelTest {
         try (LiveSet valley = LiveSet.valley()) {
             ClosureModel model = new ClosureModel(valley.session, valley.live, valley.reading);
             assertThat(model.points().get(0).topic()).isEqualTo(Answer.Topic.CLOSURE);
-            assertThat(model.points().get(0).text()).startsWith("Closes to rounding: closure error ");
+            assertThat(model.points().get(0).text()).startsWith("Closes to rounding: less than ");
             assertThat(model.spots()).isEmpty();
             assertThat(model.leads()).isEmpty();
             assertThat(model.belongs().get()).startsWith("well field").endsWith("record, 2021-10-01 to 2023-10-01");
