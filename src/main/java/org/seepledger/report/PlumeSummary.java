@@ -147,10 +147,8 @@ public final class PlumeSummary {
             text.append("  Closure cannot be judged: change in storage of water is not known.\n");
             return;
         }
-        text.append("  Closure error ").append(Figures.percent(totals.closureError()));
-        text.append(" of throughput (water: ")
-                .append(Figures.percent(waters.totals().closureError()))
-                .append("): ");
+        text.append("  Closure error ").append(error(totals));
+        text.append(" of throughput (water: ").append(error(waters.totals())).append("): ");
         text.append(rate(totals.residual()))
                 .append(" of ")
                 .append(rate(totals.throughput()))
@@ -165,9 +163,16 @@ public final class PlumeSummary {
                     .ifPresent(worst -> text.append("  Worst period: ")
                             .append(worst.period().name())
                             .append(", ")
-                            .append(Figures.percent(worst.totals().closureError()))
+                            .append(error(worst.totals()))
                             .append(".\n"));
         }
+    }
+
+    /** A closure error, or that it is no more than rounding. */
+    private static String error(Totals totals) {
+        double percent = totals.closureError();
+        double rounding = PrismResult.ROUNDING_PERCENT;
+        return Math.abs(percent) < rounding ? "less than " + Figures.percent(rounding) : Figures.percent(percent);
     }
 
     private void writeTerms(PeriodBudget budget) {
