@@ -37,7 +37,7 @@ class WindowTest {
 
     @Test
     void aClickOnASampleOpensIt() {
-        window.await(() -> window.assembly().welcome().samples().size() == 2);
+        window.await(() -> window.assembly().welcome().samples().size() == 3);
         window.robot.clickOn("Invented valley");
         window.await(() -> window.assembly().session().set().get().isPresent());
         assertThat(window.robot.lookup("#set-name").queryAs(Button.class).getText())
