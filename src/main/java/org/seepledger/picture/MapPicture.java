@@ -87,7 +87,7 @@ public final class MapPicture {
 
     private void lay(Ground under) {
         sheet.drape(under.values(), under.scale(), opacity(under));
-        if (under.contoured()) {
+        if (under.contoured() && !ValueScale.isFlat(under.values().values())) {
             sheet.contours(
                     under.values(),
                     Ticks.within(under.scale().from(), under.scale().to(), 9));

@@ -21,6 +21,9 @@ final class MapSheet {
     /** How much room coordinates need left of and below the frame. */
     static final double MARGIN = 20;
 
+    /** How far coordinates may reach beyond the frame's upper and right edge. */
+    private static final double BESIDE = 6;
+
     private static final double SMALL = 10;
     private static final double WELL = 3.2;
     private static final int MOST_TICKS = 5;
@@ -166,14 +169,18 @@ final class MapSheet {
         for (int i = 0; i < east.count(); i++) {
             double x = frame.x(east.values().get(i));
             tick(marks, x, box.bottom(), x, box.bottom() + 4);
-            marks.add(Mark.Text.of(x, box.bottom() + 15, east.label(i), SMALL, Mark.Anchor.MIDDLE)
+            double half = Lettering.width(east.label(i), SMALL) / 2;
+            double middle = Math.min(x, box.right() + BESIDE - half);
+            marks.add(Mark.Text.of(middle, box.bottom() + 15, east.label(i), SMALL, Mark.Anchor.MIDDLE)
                     .in(Ink.Token.MUTED));
         }
         Ticks north = Ticks.within(frame.south(), frame.north(), MOST_TICKS);
         for (int i = 0; i < north.count(); i++) {
             double y = frame.y(north.values().get(i));
             tick(marks, box.x() - 4, y, box.x(), y);
-            marks.add(Mark.Text.of(box.x() - 7, y, north.label(i), SMALL, Mark.Anchor.MIDDLE)
+            double half = Lettering.width(north.label(i), SMALL) / 2;
+            double middle = Math.max(y, box.y() - BESIDE + half);
+            marks.add(Mark.Text.of(box.x() - 7, middle, north.label(i), SMALL, Mark.Anchor.MIDDLE)
                     .in(Ink.Token.MUTED)
                     .turned(-90));
         }

@@ -1,5 +1,6 @@
 package org.seepledger.picture;
 
+import java.util.DoubleSummaryStatistics;
 import java.util.stream.DoubleStream;
 
 /**
@@ -13,6 +14,9 @@ public record ValueScale(Ramp ramp, double from, double to) {
 
     private static final double SHOWN = 0.98;
 
+    /** Values that differ by less than this share of their size are one value and its rounding. */
+    private static final double ROUNDING = 1e-9;
+
     /** Refuses an empty range. */
     public ValueScale {
         if (!(to > from)) {
@@ -21,16 +25,23 @@ public record ValueScale(Ramp ramp, double from, double to) {
     }
 
     /**
-     * {@return a scale from the least to the greatest of some values; a narrow one about a single value, and 0 to 1 about
-     * none}
+     * {@return a scale from the least to the greatest of some values; a narrow one about a single value, rounding
+     * aside, and 0 to 1 about none}
      *
      * @param values the values; those that are not finite do not count
      */
     public static ValueScale over(double[] values) {
         double least = finite(values).min().orElse(0);
         double greatest = finite(values).max().orElse(1);
-        double room = greatest > least ? 0 : Math.max(1e-3, 1e-3 * Math.abs(least));
+        double room = isFlat(values) ? Math.max(1e-3, 1e-3 * Math.abs(least)) : 0;
         return new ValueScale(Ramp.DEPTH, least - room, greatest + room);
+    }
+
+    /** {@return whether values are all the same but for rounding, so that lines between them would mean nothing} */
+    static boolean isFlat(double[] values) {
+        DoubleSummaryStatistics known = finite(values).summaryStatistics();
+        double size = Math.max(Math.abs(known.getMin()), Math.abs(known.getMax()));
+        return known.getCount() > 0 && known.getMax() - known.getMin() <= ROUNDING * size;
     }
 
     /**

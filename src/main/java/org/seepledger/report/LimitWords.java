@@ -28,6 +28,9 @@ final class LimitWords {
     List<String> sentences() {
         List<String> sentences = new ArrayList<>();
         addNotGiven(sentences);
+        if (totals.throughput() == 0) {
+            return sentences;
+        }
         addBelowResidual(sentences);
         addBelowUncertainty(sentences);
         addCombined(sentences);

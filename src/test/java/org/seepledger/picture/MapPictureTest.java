@@ -3,12 +3,16 @@ package org.seepledger.picture;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import java.util.Arrays;
 import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.stream.DoubleStream;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
 import org.seepledger.aquifer.Screen;
 import org.seepledger.balance.HotSpot;
 import org.seepledger.prism.Prism;
@@ -113,6 +117,50 @@ class MapPictureTest {
                 .filteredOn(text -> text.angle() == 0)
                 .extracting(Lettering::box)
                 .allMatch(page::holds);
+    }
+
+    @Test
+    void valuesThatDifferByRoundingHaveOneColourAndNoLines() {
+        Drape drape = Drape.of(Scene.GRID, Scene.GRID.window(), 100, row -> {
+            double[] values = new double[30];
+            Arrays.setAll(values, column -> 95 + 1e-13 * (column * row % 7));
+            return values;
+        });
+        ValueScale scale = ValueScale.over(drape.values());
+        MapPicture.Ground ground = new MapPicture.Ground(drape, scale, "head", "m", true);
+        Picture map = MapPicture.ofFaces(
+                Scene.aquifer(),
+                PRISM,
+                List.of(),
+                Optional.of(ground),
+                Optional.empty(),
+                Scene.budget(flows(0, 0, 0, 0)),
+                RATE,
+                WIDTH);
+        assertThat(DoubleStream.of(drape.values()).map(scale::share).boxed())
+                .allSatisfy(share -> assertThat(share).isCloseTo(0.5, within(1e-6)));
+        assertThat(Scene.flat(map.marks()))
+                .noneMatch(mark ->
+                        mark instanceof Mark.Line line && line.stroke().equals(Mark.Stroke.of(Ink.Token.TEXT, 0.7)));
+    }
+
+    @ParameterizedTest
+    @ValueSource(ints = {0, 20, 40, 60, 80})
+    void coordinatesStayInThePicture(int north) {
+        Prism far = Prisms.of("far", 0, 1, Shapes.box(8_000_000, 8_200_000 + north, 8_000_400, 8_200_300 + north));
+        Picture map = MapPicture.ofFaces(
+                Scene.aquifer(),
+                far,
+                List.of(),
+                Optional.empty(),
+                Optional.empty(),
+                Scene.budget(Map.of()),
+                RATE,
+                WIDTH);
+        assertThat(Scene.texts(map))
+                .filteredOn(text -> text.angle() != 0)
+                .isNotEmpty()
+                .allMatch(text -> text.y() >= Lettering.width(text.words(), text.size()) / 2);
     }
 
     @Test

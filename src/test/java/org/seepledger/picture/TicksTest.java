@@ -39,6 +39,11 @@ class TicksTest {
     }
 
     @Test
+    void inPowersOfTenTheyStillDiffer() {
+        assertThat(labels(1.21e10, 1.24e10, 4)).containsExactly("1.21e+10", "1.22e+10", "1.23e+10", "1.24e+10");
+    }
+
+    @Test
     void anEmptyRangeHasNone() {
         assertThatIllegalArgumentException().isThrownBy(() -> Ticks.within(1, 1, 5));
     }

@@ -110,12 +110,20 @@ class AnswerTest {
     @Test
     void closingToRoundingProvesArithmeticAlone() {
         row(Group.SIDE, "side 1", 0.1 + 0.2, 0).row(Group.SIDE, "side 2", 0, 0.3);
-        assertThat(says(Topic.CLOSURE)).first()
+        assertThat(says(Topic.CLOSURE))
+                .first()
                 .isEqualTo("Closes to rounding: less than 1e-09 % of a throughput of 0.3000 m3/d is unexplained.");
         assertThat(says(Topic.LIMITS))
                 .last()
                 .asString()
                 .contains("proves the arithmetic", "does not prove that any of them is right");
+    }
+
+    @Test
+    void whereNothingFlowsNothingIsProved() {
+        row(Group.SIDE, "side 1", 0, 0).row(Group.SIDE, "side 2", false, 0, 0);
+        assertThat(says(Topic.CLOSURE)).containsExactly("Nothing flows: there is nothing to close.");
+        assertThat(says(Topic.LIMITS)).containsExactly("No flow can be given for side 2; totals count it as 0.");
     }
 
     @Test
