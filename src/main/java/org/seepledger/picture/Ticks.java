@@ -74,7 +74,11 @@ public record Ticks(BigDecimal first, BigDecimal step, int count) {
         if (power > LARGEST_PLAIN || power < -SMALLEST_PLAIN) {
             return value.signum() == 0
                     ? "0"
-                    : String.format(Locale.ROOT, "%." + Math.max(1, value.precision() - value.scale() - 1 - power) + "e", value).replace('-', '−');
+                    : String.format(
+                                    Locale.ROOT,
+                                    "%." + Math.max(1, value.precision() - value.scale() - 1 - power) + "e",
+                                    value)
+                            .replace('-', '−');
         }
         int decimals = Math.max(0, -power);
         return String.format(Locale.ROOT, "%,." + decimals + "f", value)

@@ -36,7 +36,8 @@ final class ClosureWords {
         List<String> sentences = new ArrayList<>();
         sentences.add(overTheRecord());
         result.worstPeriod()
-                .map(worst -> "Worst period: " + worst.period().name() + ", " + error(worst.totals().closureError()) + ".")
+                .map(worst -> "Worst period: " + worst.period().name() + ", "
+                        + error(worst.totals().closureError()) + ".")
                 .ifPresent(sentences::add);
         return sentences;
     }

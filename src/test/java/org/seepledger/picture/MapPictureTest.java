@@ -140,8 +140,8 @@ class MapPictureTest {
         assertThat(DoubleStream.of(drape.values()).map(scale::share).boxed())
                 .allSatisfy(share -> assertThat(share).isCloseTo(0.5, within(1e-6)));
         assertThat(Scene.flat(map.marks()))
-                .noneMatch(mark -> mark instanceof Mark.Line line
-                        && line.stroke().equals(Mark.Stroke.of(Ink.Token.TEXT, 0.7)));
+                .noneMatch(mark ->
+                        mark instanceof Mark.Line line && line.stroke().equals(Mark.Stroke.of(Ink.Token.TEXT, 0.7)));
     }
 
     @ParameterizedTest

@@ -110,7 +110,8 @@ class AnswerTest {
     @Test
     void closingToRoundingProvesArithmeticAlone() {
         row(Group.SIDE, "side 1", 0.1 + 0.2, 0).row(Group.SIDE, "side 2", 0, 0.3);
-        assertThat(says(Topic.CLOSURE)).first()
+        assertThat(says(Topic.CLOSURE))
+                .first()
                 .isEqualTo("Closes to rounding: less than 1e-09 % of a throughput of 0.3000 m3/d is unexplained.");
         assertThat(says(Topic.LIMITS))
                 .last()
