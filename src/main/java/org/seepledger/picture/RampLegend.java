@@ -2,7 +2,6 @@ package org.seepledger.picture;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 import org.seepledger.picture.Mark.Anchor;
 import org.seepledger.picture.Mark.Stroke;
 
@@ -76,7 +75,7 @@ public final class RampLegend {
             colours[i] = scale.argb(scale.at((i + 0.5) / COLOURS), opacity);
         }
         marks.add(new Mark.Image(COLOURS, 1, colours, placement));
-        marks.add(new Mark.Area(List.of(strip.ring()), Optional.empty(), Optional.of(Stroke.of(Ink.Token.MUTED, 1))));
+        marks.add(Mark.Area.of(strip, Stroke.of(Ink.Token.MUTED, 1)));
     }
 
     private void tick(double fromX, double fromY, double toX, double toY) {
