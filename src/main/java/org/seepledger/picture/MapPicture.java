@@ -44,7 +44,8 @@ public final class MapPicture {
      * @param layer the layer's name
      * @param contoured whether lines of equal value are drawn
      */
-    public record Ground(Drape values, ValueScale scale, String quantity, String unit, String layer, boolean contoured) {}
+    public record Ground(
+            Drape values, ValueScale scale, String quantity, String unit, String layer, boolean contoured) {}
 
     private MapPicture(Aquifer aquifer, Prism subject, List<Prism> others, Optional<Ground> ground, double width) {
         this.aquifer = aquifer;
@@ -124,8 +125,8 @@ public final class MapPicture {
         return map.picture(
                 ground,
                 "Map of " + subject.name() + " with the flow through its faces",
-                "Arrows across the faces point inward where water comes in and outward where it leaves; their widths are in"
-                        + " proportion to net flow in " + unit.words() + ".");
+                "Arrows across the faces point inward where water comes in and outward where it leaves; their widths"
+                        + " are in proportion to net flow in " + unit.words() + ".");
     }
 
     /**
@@ -184,8 +185,8 @@ public final class MapPicture {
         marks.addAll(bar.marks(box.x() + NorthArrow.WIDTH + GAP, strip + 8));
         double left = box.x() + NorthArrow.WIDTH + bar.width() + 3 * GAP;
         Box room = new Box(left, strip, Math.min(LEGEND, box.right() - left), RampLegend.LEVEL_HEIGHT);
-        ground.ifPresent(under -> marks.addAll(
-                RampLegend.level(under.scale(), opacity(under), under.quantity() + ", " + under.unit() + ": " + under.layer(), room)));
+        ground.ifPresent(under -> marks.addAll(RampLegend.level(
+                under.scale(), opacity(under), under.quantity() + ", " + under.unit() + ": " + under.layer(), room)));
         return new Picture(width, height, title, description, marks);
     }
 
