@@ -66,7 +66,7 @@ public record Block(Window window, int layers) {
      * @param step the interval or instant
      * @return a value per cell
      */
-    double[] read(GriddedValues values, int step) {
+    public double[] read(GriddedValues values, int step) {
         double[] target = new double[size()];
         for (int layer = 0; layer < layers; layer++) {
             values.read(layer, step, window, target, layer * window.size());

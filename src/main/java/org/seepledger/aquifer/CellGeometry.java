@@ -98,8 +98,12 @@ public final class CellGeometry {
         return Math.max(1, Math.max(Math.abs(top[cell]), Math.abs(bottom[cell])));
     }
 
-    /** Where a cell is, as users count. */
-    String place(int cell) {
+    /**
+     * {@return where a cell is, as users count}
+     *
+     * @param cell its place in the block
+     */
+    public String place(int cell) {
         return "layer " + (cell / block.window().size() + 1) + ", row " + (row(cell) + 1) + ", column "
                 + (column(cell) + 1);
     }
@@ -173,6 +177,24 @@ public final class CellGeometry {
      */
     public boolean isPresent(int cell) {
         return thickness(cell) > pinch(cell);
+    }
+
+    /**
+     * {@return the nearest cell above or below a layer that is not pinched out; -1 where there is none}
+     *
+     * @param layer the layer to start beyond
+     * @param direction 1 to go down, -1 to go up
+     * @param row its row in the grid
+     * @param column its column in the grid
+     */
+    public int next(int layer, int direction, int row, int column) {
+        for (int k = layer + direction; k >= 0 && k < block.layers(); k += direction) {
+            int cell = block.cell(k, row, column);
+            if (!isPinchedOut(cell)) {
+                return cell;
+            }
+        }
+        return -1;
     }
 
     /**

@@ -78,6 +78,17 @@ public final class Saturation {
     }
 
     /**
+     * {@return a cell's saturated thickness at the interval's begin, in length units}
+     *
+     * @param cell its place in the block
+     */
+    public double thicknessBefore(int cell) {
+        return start.isPresent() && isWaterTable(cell)
+                ? within(start(cell), geometry.bottom(cell), geometry.top(cell)) - geometry.bottom(cell)
+                : geometry.thickness(cell);
+    }
+
+    /**
      * {@return which part of the cell's release from specific yield comes from below an elevation, from 0 to 1}
      *
      * @param cell its place in the block

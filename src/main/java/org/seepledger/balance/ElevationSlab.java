@@ -153,6 +153,40 @@ final class ElevationSlab implements Slab {
     }
 
     @Override
+    public int cellBelowTop(int row, int column) {
+        return block.cell(topLayer(row, column), row, column);
+    }
+
+    @Override
+    public int cellAboveTop(int row, int column) {
+        int cell = cellBelowTop(row, column);
+        boolean cut = elevations.top(row, column) < geometry.top(cell);
+        return cut ? cell : geometry.next(topLayer(row, column), -1, row, column);
+    }
+
+    @Override
+    public int cellAboveBottom(int row, int column) {
+        return block.cell(bottomLayer(row, column), row, column);
+    }
+
+    @Override
+    public int cellBelowBottom(int row, int column) {
+        int cell = cellAboveBottom(row, column);
+        boolean cut = elevations.bottom(row, column) > geometry.bottom(cell);
+        return cut ? cell : geometry.next(bottomLayer(row, column), 1, row, column);
+    }
+
+    @Override
+    public double floor(int row, int column) {
+        return elevations.bottom(row, column);
+    }
+
+    @Override
+    public double ceiling(int row, int column) {
+        return elevations.top(row, column);
+    }
+
+    @Override
     public boolean hasRisers() {
         return true;
     }

@@ -80,6 +80,36 @@ record LayerSlab(Chart chart, IntervalState state) implements Slab {
     }
 
     @Override
+    public int cellBelowTop(int row, int column) {
+        return state.geometry().next(chart.first() - 1, 1, row, column);
+    }
+
+    @Override
+    public int cellAboveTop(int row, int column) {
+        return state.geometry().next(chart.first(), -1, row, column);
+    }
+
+    @Override
+    public int cellAboveBottom(int row, int column) {
+        return state.geometry().next(chart.last() + 1, -1, row, column);
+    }
+
+    @Override
+    public int cellBelowBottom(int row, int column) {
+        return state.geometry().next(chart.last(), 1, row, column);
+    }
+
+    @Override
+    public double floor(int row, int column) {
+        return Double.NEGATIVE_INFINITY;
+    }
+
+    @Override
+    public double ceiling(int row, int column) {
+        return Double.POSITIVE_INFINITY;
+    }
+
+    @Override
     public boolean hasRisers() {
         return false;
     }

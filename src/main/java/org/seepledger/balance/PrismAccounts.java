@@ -7,6 +7,7 @@ import java.util.Map;
 import java.util.Optional;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.Block;
+import org.seepledger.aquifer.CellGeometry;
 import org.seepledger.aquifer.CellTerm;
 import org.seepledger.aquifer.FaceFlows;
 import org.seepledger.aquifer.IntervalState;
@@ -103,11 +104,24 @@ final class PrismAccounts {
             bookings.at(row, column);
             for (int layer = chart.first(); layer <= chart.last(); layer++) {
                 double part = slab.part(layer, row, column);
+                bookings.between(
+                        state.flows().block().cell(layer, row, column), beyond(piece, layer, state.geometry()));
                 double[] density = density(state.flows(), piece, layer, extra);
                 int account = chart.side(cut.item(pieces.side(piece)), layer);
                 bookings.throughPiece(account, part * density[0], part * density[1]);
             }
         }
+    }
+
+    /** The cell that a piece on a cell's face has on its other side; the piece's own where it runs through the cell. */
+    private int beyond(int piece, int layer, CellGeometry geometry) {
+        int row = cut.pieces().rowBeyond(piece);
+        int column = cut.pieces().columnBeyond(piece);
+        boolean onGrid = row >= 0
+                && column >= 0
+                && row < geometry.grid().rows()
+                && column < geometry.grid().columns();
+        return onGrid ? geometry.block().cell(layer, row, column) : -1;
     }
 
     /** The outflow density at a piece's begin and end, if the whole height of its cell counts. */
@@ -129,9 +143,11 @@ final class PrismAccounts {
 
     private void bookLids(Slab slab, int row, int column, double share, Bookings bookings) {
         if (!Double.isNaN(slab.top(row, column))) {
+            bookings.between(slab.cellBelowTop(row, column), slab.cellAboveTop(row, column));
             bookings.throughFace(chart.top(slab.topLayer(row, column)), share * slab.upwardAtTop(row, column));
         }
         if (!Double.isNaN(slab.bottom(row, column))) {
+            bookings.between(slab.cellAboveBottom(row, column), slab.cellBelowBottom(row, column));
             bookings.throughFace(
                     chart.bottom(slab.bottomLayer(row, column)), -share * slab.upwardAtBottom(row, column));
         }
@@ -139,7 +155,11 @@ final class PrismAccounts {
 
     private void bookRisers(FaceFlows flows, Slab slab, int row, int column, Bookings bookings) {
         for (int layer = chart.first(); layer <= chart.last(); layer++) {
-            Riser.around(flows, cut.coverage(), layer, row, column, riser -> bookRiser(riser, slab, bookings));
+            Riser.around(flows, cut.coverage(), layer, row, column, riser -> {
+                int upstream = riser.upstream(flows.block());
+                bookings.between(upstream, upstream);
+                bookRiser(riser, slab, bookings);
+            });
         }
     }
 
@@ -178,20 +198,27 @@ final class PrismAccounts {
                 continue;
             }
             bookings.fromVolume(share * slab.outflow(layer, row, column), slab.gross(layer, row, column));
+            bookings.holds(layer, cell, share, slab.floor(row, column), slab.ceiling(row, column));
             for (int i = 0; i < termAccounts.length; i++) {
                 CellTerm term = state.terms().get(i);
                 double counted = share * slab.counted(term.entry(), layer, row, column);
+                bookings.from(cell, i);
                 bookings.added(termAccounts[i] + layer - chart.first(), counted * term.rates()[cell]);
             }
         }
     }
 
     private void bookWells(IntervalState state, Slab slab, Bookings bookings) {
-        for (WellRate rate : state.wells()) {
+        for (int i = 0; i < state.wells().size(); i++) {
+            WellRate rate = state.wells().get(i);
             WellCut met = wells.get(rate.well());
             if (!chart.holds(rate.layer())) {
                 continue;
             }
+            int cell = state.flows()
+                    .block()
+                    .cell(rate.layer(), rate.well().row(), rate.well().column());
+            bookings.from(cell, state.terms().size() + i);
             bookings.at(rate.well().row(), rate.well().column());
             double counted = rule == WellRule.SPREAD ? met.share() : met.inside() ? 1 : 0;
             double part = slab.part(rate.layer(), rate.well().row(), rate.well().column());

@@ -32,6 +32,11 @@ record Riser(int layer, int row, int column, int nextRow, int nextColumn, double
         }
     }
 
+    /** The cell that the flow comes from. */
+    int upstream(Block block) {
+        return flow >= 0 ? block.cell(layer, row, column) : block.cell(layer, nextRow, nextColumn);
+    }
+
     /** What leaves through the top's step. */
     double throughTop(Slab slab) {
         return flow == 0 ? 0 : flow * (Math.max(high(slab), nextLow(slab)) - Math.max(nextHigh(slab), low(slab)));

@@ -46,6 +46,24 @@ interface Slab {
     /** The upward flow through the bottom of a whole column of cells, length³/time. */
     double upwardAtBottom(int row, int column);
 
+    /** The cell just below the prism's top; only where the range does not miss the column. */
+    int cellBelowTop(int row, int column);
+
+    /** The cell just above the prism's top, the same as below it where the top cuts a cell; -1 beyond the grid. */
+    int cellAboveTop(int row, int column);
+
+    /** The cell just above the prism's bottom. */
+    int cellAboveBottom(int row, int column);
+
+    /** The cell just below the prism's bottom, the same as above it where the bottom cuts a cell; -1 beyond the grid. */
+    int cellBelowBottom(int row, int column);
+
+    /** The elevation from which on the range holds cells of a column, in length units; may be infinite. */
+    double floor(int row, int column);
+
+    /** The elevation up to which the range holds cells of a column; may be infinite. */
+    double ceiling(int row, int column);
+
     /** Whether the lids may have steps within a layer. */
     boolean hasRisers();
 }

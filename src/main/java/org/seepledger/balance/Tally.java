@@ -6,7 +6,7 @@ import org.seepledger.fault.ProgramFault;
  * The running sums of one prism, or of one contact of two, in one interval: gross rates by account, both routes to a
  * prism's net outflow, and the area of its cells that take no part.
  */
-final class Tally implements Bookings {
+public final class Tally implements Bookings {
 
     private static final int FACES = 0;
     private static final int VOLUME = 1;
@@ -17,7 +17,13 @@ final class Tally implements Bookings {
     private final Sums routes = new Sums(3);
     private final Sums inactiveArea;
 
-    Tally(int accounts, int layers) {
+    /**
+     * Makes an empty one.
+     *
+     * @param accounts how many accounts
+     * @param layers how many layers
+     */
+    public Tally(int accounts, int layers) {
         inflow = new Sums(accounts);
         outflow = new Sums(accounts);
         inactiveArea = new Sums(layers);
@@ -67,18 +73,25 @@ final class Tally implements Bookings {
         inactiveArea.add(layer, area);
     }
 
-    void add(Tally other) {
+    /**
+     * Adds another one's sums.
+     *
+     * @param other of as many accounts and layers
+     */
+    public void add(Tally other) {
         inflow.add(other.inflow);
         outflow.add(other.outflow);
         routes.add(other.routes);
         inactiveArea.add(other.inactiveArea);
     }
 
-    double[] inflow() {
+    /** {@return gross inflow by account} */
+    public double[] inflow() {
         return inflow.toArray();
     }
 
-    double[] outflow() {
+    /** {@return gross outflow by account} */
+    public double[] outflow() {
         return outflow.toArray();
     }
 

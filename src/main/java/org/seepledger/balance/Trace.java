@@ -91,7 +91,7 @@ public final class Trace {
             Progress progress) {
         Trace trace = new Trace(aquifer, prism, rule, row, lines);
         Window window = trace.accounts.cut().coverage().window();
-        List<Window> bands = WaterBalance.bands(window, aquifer.layers().size());
+        List<Window> bands = Bands.of(window, aquifer.layers().size());
         progress.begin("tracing", (long) bands.size() * period.parts().size());
         for (Window band : bands) {
             trace.trace(band, period, rateFactor, progress);

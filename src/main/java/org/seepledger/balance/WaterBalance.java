@@ -1,14 +1,9 @@
 package org.seepledger.balance;
 
-import java.util.ArrayDeque;
 import java.util.ArrayList;
 import java.util.Arrays;
-import java.util.Deque;
 import java.util.List;
-import java.util.concurrent.ExecutionException;
-import java.util.concurrent.ExecutorService;
-import java.util.concurrent.Executors;
-import java.util.concurrent.Future;
+import java.util.concurrent.Callable;
 import java.util.function.Function;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.KnownCells;
@@ -28,8 +23,6 @@ public final class WaterBalance {
     /** How far the two routes to a prism's outflow may differ, as a share of the gross flow through the cells touched. */
     public static final double ROUTES_AGREE = 1e-12;
 
-    private static final int CELLS_IN_A_BAND = 1 << 18;
-
     private final Aquifer aquifer;
     private final KnownCells known;
     private final Span span;
@@ -45,7 +38,7 @@ public final class WaterBalance {
         this.span = span;
         List<PrismCut> cuts =
                 prisms.stream().map(prism -> PrismCut.of(prism, aquifer.grid())).toList();
-        this.window = joint(cuts);
+        this.window = Bands.joint(cuts);
         this.known = known.apply(window);
         this.wells = aquifer.placedWells().stream()
                 .filter(well -> window.contains(well.row(), well.column()))
@@ -112,28 +105,16 @@ public final class WaterBalance {
         return new WaterBalance(aquifer, known, span, prisms, rule).work(threads, progress);
     }
 
-    private static Window joint(List<PrismCut> cuts) {
-        int north = Integer.MAX_VALUE;
-        int west = Integer.MAX_VALUE;
-        int south = 0;
-        int east = 0;
-        for (PrismCut cut : cuts) {
-            Window window = cut.coverage().window();
-            north = Math.min(north, window.row());
-            west = Math.min(west, window.column());
-            south = Math.max(south, window.rowEnd());
-            east = Math.max(east, window.columnEnd());
-        }
-        return new Window(north, west, south - north, east - west);
-    }
-
     private Balance work(int threads, Progress progress) {
         Imbalance imbalance = new Imbalance(window, aquifer.layers().size());
-        List<Band> bands = bands(window, aquifer.layers().size()).stream()
-                .map(rows -> new Band(aquifer.times(), known, span, rows, prisms, contacts, wells, imbalance))
-                .toList();
+        List<Callable<BandResult>> bands = new ArrayList<>();
+        for (Window rows : Bands.of(window, aquifer.layers().size())) {
+            Band band = new Band(aquifer.times(), known, span, rows, prisms, contacts, wells, imbalance);
+            bands.add(() -> band.work(progress));
+        }
         progress.begin("balancing", (long) bands.size() * span.count());
-        BandResult total = threads == 1 ? oneByOne(bands, progress) : atOnce(bands, threads, progress);
+        BandResult total = new BandResult(prisms, contacts, span);
+        Bands.work(bands, threads, total::add);
         return new Balance(
                 ledgers(total),
                 prisms.stream().map(PrismAccounts::cut).toList(),
@@ -141,57 +122,6 @@ public final class WaterBalance {
                 imbalance,
                 prisms.stream().map(prism -> Whereabouts.of(prism, imbalance)).toList(),
                 RunNotes.of(aquifer, span, prisms, overlaps, total));
-    }
-
-    /** In the caller's own thread: to wait for another one costs time where answers are wanted many times a second. */
-    private BandResult oneByOne(List<Band> bands, Progress progress) {
-        BandResult total = new BandResult(prisms, contacts, span);
-        bands.forEach(band -> total.add(band.work(progress)));
-        return total;
-    }
-
-    private BandResult atOnce(List<Band> bands, int threads, Progress progress) {
-        BandResult total = new BandResult(prisms, contacts, span);
-        ExecutorService workers = Executors.newFixedThreadPool(threads, WaterBalance::daemon);
-        try {
-            Deque<Future<BandResult>> waiting = new ArrayDeque<>();
-            for (Band band : bands) {
-                waiting.add(workers.submit(() -> band.work(progress)));
-                if (waiting.size() > 2 * threads) {
-                    total.add(waiting.remove().get());
-                }
-            }
-            while (!waiting.isEmpty()) {
-                total.add(waiting.remove().get());
-            }
-        } catch (ExecutionException e) {
-            throw e.getCause() instanceof RuntimeException cause ? cause : new IllegalStateException(e.getCause());
-        } catch (InterruptedException e) {
-            Thread.currentThread().interrupt();
-            throw new IllegalStateException(e);
-        } finally {
-            workers.shutdownNow();
-        }
-        return total;
-    }
-
-    private static Thread daemon(Runnable work) {
-        Thread thread = new Thread(work, "balance");
-        thread.setDaemon(true);
-        return thread;
-    }
-
-    /** Bands of rows, aligned so that they fall together with the tiles of rasters. */
-    static List<Window> bands(Window window, int layers) {
-        int perRow = (window.columns() + 2) * layers;
-        int height = Math.max(8, Integer.highestOneBit(Math.max(1, CELLS_IN_A_BAND / perRow)));
-        List<Window> bands = new ArrayList<>();
-        for (int row = window.row(); row < window.rowEnd(); ) {
-            int end = Math.min(window.rowEnd(), (row / height + 1) * height);
-            bands.add(new Window(row, window.column(), end - row, window.columns()));
-            row = end;
-        }
-        return bands;
     }
 
     private List<Ledger> ledgers(BandResult total) {

@@ -2,7 +2,6 @@ package org.seepledger.cli;
 
 import java.nio.file.Path;
 import java.util.concurrent.Callable;
-import org.seepledger.fault.UsageFault;
 import org.seepledger.job.BalanceJob;
 import org.seepledger.job.BalanceOutcome;
 import org.seepledger.job.BalanceRequest;
@@ -71,11 +70,8 @@ final class BalanceCommand implements Callable<Integer> {
             description = "Unit of masses, such as kg; checked, but a water budget has none.")
     private String massUnit;
 
-    @Option(
-            names = "--max-closure-error",
-            paramLabel = "PERCENT",
-            description = "End with status 4 if a closure error of any prism and period is larger, whatever its sign.")
-    private Double maxClosureError;
+    @Mixin
+    private ClosureLimit limit = new ClosureLimit();
 
     @Option(names = "--overwrite", description = "Replace the files that an earlier run wrote to DIR.")
     private boolean overwrite;
@@ -86,27 +82,16 @@ final class BalanceCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
+        limit.check();
         Choices.measure("--mass-unit", massUnit, "kg");
         BalanceOutcome outcome = BalanceJob.run(request(), terminal.progress(options.progress()));
         terminal.out().print(outcome.summary());
         terminal.out().println();
         terminal.out().println("Written to " + out + ": " + String.join(", ", outcome.files()));
-        if (maxClosureError != null && outcome.worstClosureError() > maxClosureError) {
-            terminal.out()
-                    .println("The worst closure error is " + outcome.worstClosureError() + " %, more than the "
-                            + maxClosureError + " % allowed.");
-            return Faults.CLOSURE;
-        }
-        if (maxClosureError != null && Double.isNaN(outcome.worstClosureError())) {
-            terminal.out().println("No closure error can be given, so that --max-closure-error was not checked.");
-        }
-        return 0;
+        return limit.status(outcome.worstClosureError(), terminal.out());
     }
 
     private BalanceRequest request() {
-        if (maxClosureError != null && !(maxClosureError >= 0)) {
-            throw new UsageFault("--max-closure-error is " + maxClosureError + "; give a percentage of 0 or more.");
-        }
         return new BalanceRequest(
                 aquifer,
                 prisms,

@@ -76,7 +76,12 @@ final class BudgetOptions {
     }
 
     Optional<Measure> rateUnit() {
-        return Choices.measure("--rate-unit", rateUnit, "m3/d");
+        return rateUnit("m3/d");
+    }
+
+    /** The unit of rates, which must measure the same as another. */
+    Optional<Measure> rateUnit(String like) {
+        return Choices.measure("--rate-unit", rateUnit, like);
     }
 
     WellRule wells() {

@@ -31,6 +31,7 @@ import picocli.CommandLine.IVersionProvider;
             BalanceCommand.class,
             TraceCommand.class,
             ExtractCommand.class,
+            PlumeCommand.class,
             DesktopCommand.class
         },
         mixinStandardHelpOptions = true,
@@ -104,6 +105,9 @@ public final class Seepledger {
                 }
                 if (type == TraceCommand.class) {
                     return type.cast(new TraceCommand(terminal));
+                }
+                if (type == PlumeCommand.class) {
+                    return type.cast(new PlumeCommand(terminal));
                 }
                 if (type == ExtractCommand.class) {
                     return type.cast(new ExtractCommand(terminal));

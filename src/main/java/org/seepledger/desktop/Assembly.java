@@ -13,6 +13,7 @@ import org.seepledger.desktop.draw.DraftHand;
 import org.seepledger.desktop.draw.DraftModel;
 import org.seepledger.desktop.draw.Tray;
 import org.seepledger.desktop.folio.Folio;
+import org.seepledger.desktop.map.GroundModel;
 import org.seepledger.desktop.map.MapModel;
 import org.seepledger.desktop.map.MapView;
 import org.seepledger.desktop.map.ShowingBar;
@@ -61,7 +62,13 @@ final class Assembly {
         this.hand = new DraftHand(draft);
         this.files = new DraftFiles(draft, outside.tasks(), outside.dialogs(), outside.questions());
         this.tray = new Tray(draft, hand);
-        this.mapView = new MapView(map, outside.tasks(), shell.theme(), hand, tray);
+        this.mapView = new MapView(
+                map,
+                new GroundModel(session, outside.tasks(), outside.dialogs()),
+                outside.tasks(),
+                shell.theme(),
+                hand,
+                tray);
         draft.version().addListener((version, before, after) -> mapView.repaint());
         draft.tool().addListener((tool, before, after) -> mapView.repaint());
         Folio folio = new Folio(session, outside.tasks(), outside.copies(), shell.theme());

@@ -61,7 +61,7 @@ public final class ExtractJob {
             progress.step();
             return out.file(name);
         };
-        AquiferCut.write(subject.folder(), subject.crs(), cells, target, subject.notes()::add);
+        AquiferCut.write(subject.folder(), subject.crs(), cells, target);
         String prisms = copyPrisms(cells, target);
         writeRecord(out);
         List<String> written = out.written();

@@ -32,6 +32,7 @@ final class Subject implements AutoCloseable {
     private final List<Prism> prisms;
     private final List<String> warnings = new ArrayList<>();
     private final List<String> notes = new ArrayList<>();
+    private final List<Path> more = new ArrayList<>();
     private Optional<Path> periodsFile = Optional.empty();
 
     private Subject(AquiferFolder folder, Path prismsFile, boolean clip) {
@@ -106,6 +107,12 @@ final class Subject implements AutoCloseable {
                 .orElseGet(() -> periods.every(every, waterYearStart));
     }
 
+    /** A file of the request that is read beside set and prisms, and counts among the inputs. */
+    Path alsoReads(Path file) {
+        more.add(file);
+        return file;
+    }
+
     /** The units of results. */
     ResultUnits units(Optional<Measure> rate, Optional<Measure> volume) {
         return units(aquifer(), rate, volume);
@@ -139,6 +146,7 @@ final class Subject implements AutoCloseable {
         files.add(Map.entry(prismsFile.toString(), prismsFile));
         files.addAll(surfaces.inputs().entrySet());
         periodsFile.ifPresent(file -> files.add(Map.entry(file.toString(), file)));
+        more.forEach(file -> files.add(Map.entry(file.toString(), file)));
         progress.begin("fingerprinting inputs", files.size());
         List<FileRecord> records = new ArrayList<>();
         for (Map.Entry<String, Path> file : files) {

@@ -4,10 +4,7 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.concurrent.locks.ReadWriteLock;
-import java.util.concurrent.locks.ReentrantReadWriteLock;
 import java.util.function.Consumer;
-import java.util.function.Function;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.KeptCells;
 import org.seepledger.aquifer.Window;
@@ -49,8 +46,7 @@ public final class Workbench implements AutoCloseable {
     private final AquiferFolder folder;
     private final SurfaceRasters surfaces;
     private final KeptCells kept;
-    private final ReadWriteLock open = new ReentrantReadWriteLock();
-    private volatile boolean closed;
+    private final Gate gate = new Gate();
 
     private Workbench(AquiferFolder folder) {
         this.folder = folder;
@@ -134,7 +130,7 @@ public final class Workbench implements AutoCloseable {
      * @throws org.seepledger.fault.DataFault if anything in it is wrong
      */
     public PrismsFile read(Path file) {
-        return ask(Progress.NONE, progress -> {
+        return gate.ask(Progress.NONE, progress -> {
             List<String> notes = new ArrayList<>();
             synchronized (surfaces) {
                 return new PrismsFile(reader(notes::add).asDrawn(file, file.toString()), notes);
@@ -150,7 +146,7 @@ public final class Workbench implements AutoCloseable {
      * @throws org.seepledger.fault.DataFault if it is damaged, or a surface cannot be read
      */
     public DrawingFile drawing(Path file) {
-        return ask(Progress.NONE, progress -> {
+        return gate.ask(Progress.NONE, progress -> {
             List<String> notes = new ArrayList<>();
             String shown = file.toString();
             Drawing drawing = new DrawingReader(crs(), aquifer().layers().size(), notes::add).read(file, shown);
@@ -158,6 +154,17 @@ public final class Workbench implements AutoCloseable {
                 return DrawingFile.of(drawing, DataFolder.holding(file, shown), surfaces, notes);
             }
         });
+    }
+
+    /**
+     * {@return a picture that lies under the map}
+     *
+     * @param file a GeoTIFF in the aquifer's coordinate system
+     * @param progress told how far the reading is
+     * @throws org.seepledger.fault.DataFault if it cannot be read, or lies in another system
+     */
+    public GroundPicture ground(Path file, Progress progress) {
+        return gate.ask(progress, until -> GroundPicture.read(file, crs(), until));
     }
 
     /**
@@ -190,7 +197,7 @@ public final class Workbench implements AutoCloseable {
      * @throws Cancelled if the work was stopped
      */
     public List<IntervalBudget> budgets(List<Prism> prisms, int interval, Progress progress) {
-        return ask(progress, until -> {
+        return gate.ask(progress, until -> {
             List<IntervalBudget> budgets = new ArrayList<>();
             for (Prism prism : prisms) {
                 budgets.add(budget(prism, interval, until));
@@ -221,7 +228,7 @@ public final class Workbench implements AutoCloseable {
      * @throws Cancelled if the work was stopped
      */
     public RecordBudget record(List<Prism> prisms, Progress progress) {
-        return ask(progress, until -> {
+        return gate.ask(progress, until -> {
             List<String> notes = new ArrayList<>();
             PrismsReader reader = reader(notes::add);
             List<Prism> admitted = prisms.stream().map(reader::admitted).toList();
@@ -242,7 +249,7 @@ public final class Workbench implements AutoCloseable {
      * @throws Cancelled if the workbench was closed
      */
     public List<MapQuantity> quantities() {
-        stopIfClosed();
+        gate.mustBeOpen();
         return new LayerReading(aquifer(), Progress.NONE).quantities();
     }
 
@@ -261,7 +268,7 @@ public final class Workbench implements AutoCloseable {
      */
     public GridLayer layer(
             MapQuantity quantity, int layer, int interval, Window window, int stride, Progress progress) {
-        return ask(
+        return gate.ask(
                 progress, until -> new LayerReading(aquifer(), until).layer(quantity, layer, interval, window, stride));
     }
 
@@ -278,7 +285,7 @@ public final class Workbench implements AutoCloseable {
      * @throws Cancelled if the work was stopped
      */
     public FluxField flux(int layer, int interval, Window window, int stride, Progress progress) {
-        return ask(progress, until -> new LayerReading(aquifer(), until).flux(layer, interval, window, stride));
+        return gate.ask(progress, until -> new LayerReading(aquifer(), until).flux(layer, interval, window, stride));
     }
 
     /**
@@ -294,48 +301,12 @@ public final class Workbench implements AutoCloseable {
         return Math.max(1, Runtime.getRuntime().availableProcessors() - 1);
     }
 
-    private <T> T ask(Progress progress, Function<Progress, T> question) {
-        open.readLock().lock();
-        try {
-            stopIfClosed();
-            return question.apply(untilClosed(progress));
-        } finally {
-            open.readLock().unlock();
-        }
-    }
-
-    private Progress untilClosed(Progress progress) {
-        return new Progress() {
-            @Override
-            public void begin(String what, long steps) {
-                stopIfClosed();
-                progress.begin(what, steps);
-            }
-
-            @Override
-            public void step() {
-                stopIfClosed();
-                progress.step();
-            }
-        };
-    }
-
-    private void stopIfClosed() {
-        if (closed) {
-            throw new Cancelled();
-        }
-    }
-
     /** Stops all questions and closes the set's files. */
     @Override
     public void close() {
-        closed = true;
-        open.writeLock().lock();
-        try {
+        gate.shut(() -> {
             surfaces.close();
             folder.close();
-        } finally {
-            open.writeLock().unlock();
-        }
+        });
     }
 }

@@ -10,6 +10,12 @@ public enum Group {
     LID,
     /** What sources add and take. */
     SOURCE,
+    /** What spreads through sides and lids beside the mean flow; of solutes alone. */
+    DISPERSION,
+    /** What decays; of solutes alone. */
+    DECAY,
+    /** What the decay of another solute produces. */
+    PRODUCTION,
     /** What storage gives and takes. */
     STORAGE,
     /** Totals of a prism and period. */

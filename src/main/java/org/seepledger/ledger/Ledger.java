@@ -56,6 +56,15 @@ public final class Ledger {
     }
 
     /**
+     * {@return gross outflow in an interval by account, a copy}
+     *
+     * @param interval from 0
+     */
+    public double[] outflow(int interval) {
+        return outflow[interval].clone();
+    }
+
+    /**
      * {@return the budget of a period}
      *
      * @param period the period

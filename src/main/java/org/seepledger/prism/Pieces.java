@@ -178,6 +178,28 @@ public final class Pieces {
     }
 
     /**
+     * {@return the row of the cell on a piece's outer side: another than the piece's own where it lies on a cell's north or
+     * south face; may lie beyond the grid}
+     *
+     * @param piece from 0
+     */
+    public int rowBeyond(int piece) {
+        double up = onLineUp(piece);
+        return Double.isNaN(up) ? rows[piece] : up == 1 ? rows[piece] - 1 : rows[piece] + 1;
+    }
+
+    /**
+     * {@return the column of the cell on a piece's outer side: another than the piece's own where it lies on a cell's west
+     * or east face; may lie beyond the grid}
+     *
+     * @param piece from 0
+     */
+    public int columnBeyond(int piece) {
+        double across = onLineAcross(piece);
+        return Double.isNaN(across) ? columns[piece] : across == 0 ? columns[piece] - 1 : columns[piece] + 1;
+    }
+
+    /**
      * {@return the share of a piece's cell that lies behind the piece, seen from a place in that cell: positive where the
      * place is on the piece's inner side}
      *

@@ -16,7 +16,7 @@ import tech.units.indriya.unit.Units;
  * A unit as a user writes it: {@code m/d}, {@code mm/yr}, {@code acre-ft/yr}, {@code mg/L}.
  *
  * <p>Powers are a digit after a length ({@code ft3}); at most one {@code /}. {@code cfs}, {@code gpm} and {@code AF} are
- * understood too. Two measures are equal when they are written the same.
+ * understood too, and the Greek letter for {@code u}. Two measures are equal when they are written the same.
  */
 public final class Measure {
 
@@ -42,7 +42,7 @@ public final class Measure {
      * @throws IllegalArgumentException if it names none; the message lists what can be written
      */
     public static Measure of(String text) {
-        String written = text.strip();
+        String written = text.strip().replace('\u00b5', 'u').replace('\u03bc', 'u');
         String[] terms = SPOKEN.getOrDefault(written, written).split("/", -1);
         if (terms.length > 2) {
             throw unknown(written);

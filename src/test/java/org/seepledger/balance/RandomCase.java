@@ -31,13 +31,13 @@ import org.seepledger.prism.Side;
 import org.seepledger.unit.Measure;
 
 /** A random heterogeneous aquifer and prisms in it, from a seed. */
-final class RandomCase {
+public final class RandomCase {
 
-    final Random random;
-    final Grid grid;
-    final int layers;
+    public final Random random;
+    public final Grid grid;
+    public final int layers;
 
-    RandomCase(long seed) {
+    public RandomCase(long seed) {
         random = new Random(seed);
         layers = 1 + random.nextInt(4);
         double rotation = random.nextInt(3) == 0 ? random.nextDouble() * 360 : 90 * random.nextInt(2);
@@ -57,12 +57,12 @@ final class RandomCase {
         return Axis.of(edges);
     }
 
-    int cells() {
+    public int cells() {
         return grid.rows() * grid.columns();
     }
 
     /** Random values in every layer; a share of them missing. */
-    double[][] values(double missing) {
+    public double[][] values(double missing) {
         double[][] values = new double[layers][cells()];
         for (double[] layer : values) {
             for (int i = 0; i < layer.length; i++) {
@@ -80,7 +80,7 @@ final class RandomCase {
         return new ArrayValues(grid.columns(), new double[][][] {values(missing)});
     }
 
-    Aquifer aquifer(double missing, double pinched, int wells) {
+    public Aquifer aquifer(double missing, double pinched, int wells) {
         Flow flow = new GivenFaceFlow(
                 quantity(missing),
                 quantity(missing),
@@ -154,7 +154,7 @@ final class RandomCase {
     }
 
     /** A star-shaped prism with, at random, an island and a second part; vertices often on grid lines and corners. */
-    Prism prism(String name) {
+    public Prism prism(String name) {
         double width = grid.x().edge(grid.columns());
         double height = grid.y().edge(grid.rows());
         int first = random.nextInt(layers);

@@ -1,12 +1,12 @@
 package org.seepledger.balance;
 
 /** How errors fall as cells are halved, for tests. */
-final class Refinement {
+public final class Refinement {
 
     private Refinement() {}
 
     /** The measured order of convergence between the two finest of at least three grids, printed for the reader. */
-    static double order(String what, double... errors) {
+    public static double order(String what, double... errors) {
         StringBuilder shown = new StringBuilder();
         for (double error : errors) {
             shown.append(String.format(" %.3e", Math.abs(error)));

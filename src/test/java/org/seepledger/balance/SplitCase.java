@@ -18,14 +18,14 @@ import org.seepledger.prism.VerticalRange;
  * A random polygon cut in two along two sides that meet at a place inside it. Outer sides count under {@code outer 1},
  * {@code outer 2} and so on in the whole and in its halves, the shared ones under {@code cut 1} and {@code cut 2}.
  */
-final class SplitCase {
+public final class SplitCase {
 
-    final Prism whole;
-    final Prism first;
-    final Prism second;
-    final List<String> outer = new ArrayList<>();
+    public final Prism whole;
+    public final Prism first;
+    public final Prism second;
+    public final List<String> outer = new ArrayList<>();
 
-    SplitCase(RandomCase random) {
+    public SplitCase(RandomCase random) {
         Grid grid = random.grid;
         Random dice = random.random;
         double width = grid.x().edge(grid.columns());
@@ -94,7 +94,7 @@ final class SplitCase {
     }
 
     /** Two boxes of whole cells that share a side on a grid line along x or y. */
-    static List<Prism> boxes(RandomCase random, boolean alongX) {
+    public static List<Prism> boxes(RandomCase random, boolean alongX) {
         Grid grid = random.grid;
         Axis axis = alongX ? grid.y() : grid.x();
         double width = grid.x().edge(grid.columns());

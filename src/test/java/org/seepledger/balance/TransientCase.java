@@ -30,21 +30,21 @@ import org.seepledger.unit.Measure;
  * A random aquifer with moving heads, storage, recharge and wells, and a source in each cell that makes it balance: any
  * prism in it must close to rounding.
  */
-final class TransientCase {
+public final class TransientCase {
 
     private static final int INTERVALS = 3;
 
-    final RandomCase base;
-    final Random random;
-    final Aquifer aquifer;
+    public final RandomCase base;
+    public final Random random;
+    public final Aquifer aquifer;
     private final int mostWells;
     private final int columns;
 
-    TransientCase(long seed) {
+    public TransientCase(long seed) {
         this(seed, 5);
     }
 
-    TransientCase(long seed, int mostWells) {
+    public TransientCase(long seed, int mostWells) {
         this.mostWells = mostWells;
         base = new RandomCase(seed);
         random = base.random;
@@ -208,7 +208,7 @@ final class TransientCase {
     }
 
     /** A random prism between random elevations or surfaces. */
-    Prism prism(String name) {
+    public Prism prism(String name) {
         Prism shape = base.prism(name);
         Optional<GriddedValues> top = random.nextInt(4) == 0 ? Optional.empty() : Optional.of(surface(2, 12));
         Optional<GriddedValues> bottom = random.nextInt(4) == 0 ? Optional.empty() : Optional.of(surface(-8, 12));

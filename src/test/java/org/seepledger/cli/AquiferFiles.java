@@ -161,6 +161,15 @@ final class AquiferFiles {
         return Ran.of(all.toArray(String[]::new));
     }
 
+    /** Writes all and runs {@code plume} with more options. */
+    Ran plume(String... options) {
+        write();
+        List<String> all = new ArrayList<>(
+                List.of("plume", aquifer().toString(), "--prisms", prisms().toString(), "--out", out().toString()));
+        all.addAll(List.of(options));
+        return Ran.of(all.toArray(String[]::new));
+    }
+
     Ran inspect() {
         write();
         return Ran.of("inspect", aquifer().toString());

@@ -41,6 +41,11 @@ class BadDataTest {
         return bad(path + " = " + value, files -> files.with(path, value), words);
     }
 
+    /** A solute with some keys. */
+    private static Case solute(String keys, String... words) {
+        return key("solutes", "[{'name': 'a', " + keys + "}]", words);
+    }
+
     static Stream<Case> keys() {
         return Stream.of(
                 key("grids", "1", "aquifer.json: found the unknown key \"grids\"", "Did you mean \"grid\"?"),
@@ -142,6 +147,35 @@ class BadDataTest {
                         "solutes",
                         "[{'name': 'a', 'half_life': 'x.tif', 'decay_rate': 1}]",
                         "at most one of \"half_life\""),
+                solute("'concentration': 5", "no \"unit\""),
+                solute("'concentration': -5, 'unit': 'mg/L'", "concentration: found -5.0", "0 or more"),
+                solute("'concentration': 5, 'unit': 'm'", "the unit of something else"),
+                solute("'concentration': 5, 'unit': 'mgl'", "unknown unit \"mgl\""),
+                solute("'half_life': 0", "half_life: found 0.0", "more than 0"),
+                solute("'decay_rate': -1", "decay_rate: found -1.0"),
+                solute("'sorption': {'isotherm': 'linear', 'kd': 1}", "no \"bulk_density\""),
+                solute("'bulk_density': 1700, 'sorption': {'isotherm': 'linear'}", "no \"kd\" or \"koc\""),
+                solute("'bulk_density': 1700, 'sorption': {'isotherm': 'linear', 'koc': 1}", "no \"foc\""),
+                solute("'bulk_density': 1700, 'sorption': {'isotherm': 'linear', 'koc': 1, 'foc': 2}", "from 0 to 1"),
+                solute(
+                        "'bulk_density': 1700, 'sorption': {'isotherm': 'linear', 'kd': 1, 'foc': 0.1}",
+                        "\"foc\" beside \"kd\""),
+                solute(
+                        "'bulk_density': 1700, 'sorption': {'isotherm': 'freundlich', 'kf': 1, 'kd': 1}",
+                        "\"kd\" beside a Freundlich isotherm"),
+                solute("'bulk_density': 1700, 'sorption': {'isotherm': 'freundlich', 'kf': 1}", "no \"n\""),
+                solute(
+                        "'bulk_density': 1700, 'sorption': {'isotherm': 'freundlich', 'kf': 1, 'n': 1, 'unit': 'm3/kg'}",
+                        "found \"m3/kg\""),
+                solute("'bulk_density': 1700, 'sorption': {'isotherm': 'langmuir', 'affinity': 1}", "no \"capacity\""),
+                solute("'parent': 'b', 'yield': 1", "unknown solute \"b\""),
+                solute("'parent': 'a', 'yield': 1", "leads back to \"a\""),
+                solute("'yield': 1", "a \"parent\" too"),
+                solute("'dispersion': {'longitudinal': -1}", "longitudinal: found -1.0"),
+                key(
+                        "sources",
+                        "[{'category': 'rain', 'kind': 'areal', 'rate': 1, 'concentration': {'chlorid': 1}}]",
+                        "unknown solute \"chlorid\""),
                 key("solutes", "[{'name': 'a', 'half_life': true}]", "half_life: found true"),
                 key("sources", AREAL.formatted("{'value': 1, 'unit': 'm3/d'}"), "sources, entry 1, rate:", "\"m/d\""),
                 key("sources", "[{'category': '', 'kind': 'areal', 'rate': 0}]", "category: found \"\"", "not empty"),

@@ -33,7 +33,7 @@ class HelpTest {
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"", "inspect", "balance", "trace", "extract"})
+    @ValueSource(strings = {"", "inspect", "balance", "trace", "extract", "plume"})
     void givesAnExampleThatWorks(String command) {
         Ran help = command.isEmpty() ? Ran.of("--help") : Ran.of(command, "--help");
         assertThat(help.status()).isZero();
@@ -42,7 +42,7 @@ class HelpTest {
                 .replaceAll(" \\\\\\R *", " ")
                 .lines()
                 .map(String::strip)
-                .filter(line -> line.startsWith("seepledger ") && line.contains("sample-aquifers/terrace"))
+                .filter(line -> line.startsWith("seepledger ") && line.contains("sample-aquifers/"))
                 .toList();
         assertThat(examples).isNotEmpty();
         for (String example : examples) {
@@ -71,7 +71,12 @@ class HelpTest {
     @Test
     void fitsTheTerminal() {
         for (String[] command : new String[][] {
-            {"--help"}, {"inspect", "--help"}, {"balance", "--help"}, {"trace", "--help"}, {"extract", "--help"}
+            {"--help"},
+            {"inspect", "--help"},
+            {"balance", "--help"},
+            {"trace", "--help"},
+            {"extract", "--help"},
+            {"plume", "--help"}
         }) {
             assertThat(Ran.of(command).out().lines()).allMatch(line -> line.length() <= 100);
         }

@@ -134,7 +134,7 @@ class InspectTest {
                         + " 'sorption': {'isotherm': 'linear', 'kd': 0.0, 'unit': 'L/kg'}, 'half_life': null,"
                         + " 'sorbed_half_life': null, 'parent': 'salt', 'yield': 0.5, 'boundary_concentration': 3,"
                         + " 'dispersion': {'longitudinal': 10, 'transverse': 1, 'vertical': 0.1, 'diffusion': 1e-4,"
-                        + " 'tortuosity': 0.5}}]";
+                        + " 'tortuosity': 0.5}}, {'name': 'salt'}]";
         AquiferFiles files = files().with("flow/z", "1e-3").with("solutes", whole);
         assertThat(warnings(files)).isEqualTo("  none");
         assertThat(inspected(files))

@@ -5,10 +5,8 @@ import static org.assertj.core.api.Assertions.assertThat;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 import java.util.stream.Collectors;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
@@ -21,16 +19,15 @@ import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.seepledger.balance.Periods;
-import org.seepledger.balance.WellRule;
+import org.seepledger.desktop.budget.LiveSet;
 import org.seepledger.desktop.draw.Tool;
 import org.seepledger.desktop.ledger.LedgerRow;
 import org.seepledger.desktop.map.Camera;
 import org.seepledger.desktop.session.Drawing;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.job.BalanceJob;
-import org.seepledger.job.BalanceRequest;
 import org.seepledger.job.MapQuantity;
-import org.seepledger.job.ReportRequest;
+import org.seepledger.job.Requests;
 import org.seepledger.prism.Prism;
 import org.seepledger.prism.Ring;
 import org.seepledger.prism.Side;
@@ -121,6 +118,9 @@ class FolioTest {
         window.await(() -> text("#ledger-belongs").contains("record, 2021-10-01 to 2023-10-01"));
         window.robot.clickOn("#ledger-copy");
         assertThat(window.answers.copied.get(0)).contains("\tL/s").startsWith("well field");
+        choose("#ledger-period", Periods.Every.WATER_YEAR);
+        choose("#ledger-month", 4);
+        window.await(() -> text("#ledger-belongs").contains("water year 2022, 2021-10-01 to 2022-04-01"));
     }
 
     @Test
@@ -166,7 +166,7 @@ class FolioTest {
     @Test
     void whatCannotBeBalancedIsSaidInThePaneAndTheWindowLivesOn() {
         openSet(VALLEY);
-        draw(List.of(moved(session().selectedPrism().orElseThrow(), 1e6)), true);
+        draw(List.of(LiveSet.moved(session().selectedPrism().orElseThrow(), 1e6)), true);
         window.await(() -> window.robot
                 .lookup(".sl-notice-words")
                 .match((Label label) -> label.isVisible() && label.getText().contains("outside the grid"))
@@ -187,9 +187,9 @@ class FolioTest {
         openSet(VALLEY);
         Prism first = session().selectedPrism().orElseThrow();
         for (int step = 1; step <= 12; step++) {
-            draw(List.of(moved(first, 3.7 * step)), false);
+            draw(List.of(LiveSet.moved(first, 3.7 * step)), false);
         }
-        Prism dropped = moved(first, 3.7 * 12);
+        Prism dropped = LiveSet.moved(first, 3.7 * 12);
         draw(List.of(dropped), true);
         choose("#ledger-arrangement", org.seepledger.desktop.ledger.Arrangement.ITEMS_BY_LAYER);
         window.robot.interact(() -> session().interval().set(4));
@@ -212,22 +212,7 @@ class FolioTest {
     private static List<String> commandsNets(Path folder, Prism prism, String period) throws IOException {
         Path prisms = folder.resolve("prisms.geojson");
         Files.writeString(prisms, geoJson(prism));
-        BalanceJob.run(
-                new BalanceRequest(
-                        VALLEY,
-                        prisms,
-                        folder.resolve("out"),
-                        Periods.Every.INTERVAL,
-                        Optional.empty(),
-                        10,
-                        Optional.empty(),
-                        Optional.empty(),
-                        WellRule.POINT,
-                        true,
-                        1,
-                        false,
-                        ReportRequest.dated(LocalDate.of(2024, 5, 31))),
-                Progress.NONE);
+        BalanceJob.run(Requests.byInterval(VALLEY, prisms, folder.resolve("out")), Progress.NONE);
         return Files.readAllLines(folder.resolve("out/budget.csv")).stream()
                 .map(line -> line.split(",", -1))
                 .filter(cells -> cells.length == 17 && cells[1].equals(period) && !cells[6].equals("total"))
@@ -266,17 +251,5 @@ class FolioTest {
     private void draw(List<Prism> prisms, boolean settled) {
         window.robot.interact(() ->
                 session().drawing().set(new Drawing(session().drawing().get().revision() + 1, prisms, settled)));
-    }
-
-    private static Prism moved(Prism prism, double distance) {
-        List<Ring> rings = prism.rings().stream()
-                .map(ring -> new Ring(
-                        ring.part(),
-                        ring.island(),
-                        ring.sides().stream()
-                                .map(side -> new Side(side.name(), side.item(), side.x() + distance, side.y()))
-                                .toList()))
-                .toList();
-        return new Prism(prism.name(), rings, prism.range());
     }
 }

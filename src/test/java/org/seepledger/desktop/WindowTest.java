@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.catchThrowable;
 
 import java.nio.file.Path;
 import java.util.Optional;
+import javafx.scene.Node;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.input.KeyCode;
@@ -36,7 +37,7 @@ class WindowTest {
 
     @Test
     void aClickOnASampleOpensIt() {
-        window.await(() -> window.assembly().welcome().samples().size() == 2);
+        window.await(() -> window.assembly().welcome().samples().size() == 3);
         window.robot.clickOn("Invented valley");
         window.await(() -> window.assembly().session().set().get().isPresent());
         assertThat(window.robot.lookup("#set-name").queryAs(Button.class).getText())
@@ -90,6 +91,27 @@ class WindowTest {
             window.robot.press(KeyCode.PAGE_DOWN).release(KeyCode.PAGE_DOWN);
         }
         assertThat(window.assembly().session().layer().get()).isEqualTo(2);
+    }
+
+    private boolean isFocusIn(String selector) {
+        Node owner = window.assembly().scene().getFocusOwner();
+        while (owner != null && !owner.equals(window.robot.lookup(selector).query())) {
+            owner = owner.getParent();
+        }
+        return owner != null;
+    }
+
+    @Test
+    void theKeyboardGoesFromPaneToPane() {
+        window.openSet(Path.of("sample-aquifers/valley"));
+        window.settle();
+        assertThat(isFocusIn("#map")).isTrue();
+        for (int i = 0; i < 2; i++) {
+            window.robot.press(KeyCode.F6).release(KeyCode.F6);
+            assertThat(isFocusIn("#map")).isFalse();
+        }
+        window.robot.press(KeyCode.F6).release(KeyCode.F6);
+        assertThat(isFocusIn("#map")).isTrue();
     }
 
     @Test

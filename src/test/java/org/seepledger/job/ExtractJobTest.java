@@ -7,13 +7,9 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
-import java.time.LocalDate;
 import java.util.List;
-import java.util.Optional;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
-import org.seepledger.balance.Periods;
-import org.seepledger.balance.WellRule;
 import org.seepledger.fault.UsageFault;
 import org.seepledger.progress.Progress;
 
@@ -60,22 +56,21 @@ class ExtractJobTest {
                 .hasSizeLessThan(Rows.of(folder.resolve("set/faces.csv")).size());
     }
 
-    /** Of solutes, what is read is kept, with its files; what names files that are not copied goes. */
+    /** What is read of solutes goes along, with its files, values below a limit as they are written. */
     @Test
-    void keepsThePorositiesOfSolutesAlone() throws IOException {
+    void keepsSolutes() throws IOException {
         Path set = folder.resolve("set");
         SmallSets.heads(set);
         Files.writeString(set.resolve("pores.csv"), "layer,n\n1,0.3\n2,0.2\n");
         Path description = set.resolve("aquifer.json");
         String solutes = "{\"solutes\": [{\"name\": \"salt\", \"porosity\": {\"file\": \"pores.csv\"},"
-                + " \"concentration\": \"not-there.tif\"}], ";
+                + " \"concentration\": {\"file\": \"salt.csv\"}, \"unit\": \"mg/L\"}], ";
+        Files.writeString(set.resolve("salt.csv"), "instant,c\n0,5\n1,<2\n");
         Files.writeString(description, Files.readString(description).replaceFirst("\\{", solutes));
         assertSameBudget(set);
         assertThat(folder.resolve("extract/pores.csv")).exists();
-        assertThat(folder.resolve("extract/aquifer.json"))
-                .content()
-                .contains("salt", "pores.csv")
-                .doesNotContain("not-there");
+        assertThat(folder.resolve("extract/aquifer.json")).content().contains("salt", "pores.csv", "mg/L");
+        assertThat(folder.resolve("extract/salt.csv")).content().contains("1,<2");
     }
 
     @Test
@@ -122,22 +117,7 @@ class ExtractJobTest {
 
     private List<String> budget(Path set, Path prisms, String name) throws IOException {
         Path out = folder.resolve(name);
-        BalanceJob.run(
-                new BalanceRequest(
-                        set,
-                        prisms,
-                        out,
-                        Periods.Every.INTERVAL,
-                        Optional.empty(),
-                        10,
-                        Optional.empty(),
-                        Optional.empty(),
-                        WellRule.POINT,
-                        true,
-                        2,
-                        false,
-                        ReportRequest.dated(LocalDate.of(2024, 5, 31))),
-                Progress.NONE);
+        BalanceJob.run(Requests.byInterval(set, prisms, out), Progress.NONE);
         return Rows.text(out.resolve("budget.csv"));
     }
 }

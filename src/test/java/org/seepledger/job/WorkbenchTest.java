@@ -5,7 +5,6 @@ import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import java.io.IOException;
 import java.nio.file.Path;
-import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -17,7 +16,6 @@ import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.seepledger.balance.Periods;
-import org.seepledger.balance.WellRule;
 import org.seepledger.fault.DataFault;
 import org.seepledger.io.result.BudgetCsv;
 import org.seepledger.io.result.PrismBudget;
@@ -70,22 +68,7 @@ class WorkbenchTest {
     private void assertCommandsNumbers(Path set) throws IOException {
         Path prisms = set.resolve("prisms.geojson");
         Path out = folder.resolve("out");
-        BalanceJob.run(
-                new BalanceRequest(
-                        set,
-                        prisms,
-                        out,
-                        Periods.Every.INTERVAL,
-                        Optional.empty(),
-                        10,
-                        Optional.empty(),
-                        Optional.empty(),
-                        WellRule.POINT,
-                        true,
-                        2,
-                        false,
-                        ReportRequest.dated(LocalDate.of(2024, 5, 31))),
-                Progress.NONE);
+        BalanceJob.run(Requests.byInterval(set, prisms, out), Progress.NONE);
         try (Workbench bench = Workbench.open(set)) {
             List<Prism> drawn = bench.read(prisms).prisms();
             List<Period> periods = bench.periods(Periods.Every.INTERVAL, 1);

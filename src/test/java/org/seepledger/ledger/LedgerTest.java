@@ -165,7 +165,7 @@ class LedgerTest {
     void groupsAreWrittenInSmallLetters() {
         assertThat(Group.values())
                 .extracting(Group::toString)
-                .containsExactly("side", "lid", "source", "storage", "total");
+                .containsExactly("side", "lid", "source", "dispersion", "decay", "production", "storage", "total");
     }
 
     @Test

@@ -57,15 +57,14 @@ public record BudgetShown(Prism prism, double area, PeriodBudget budget, List<St
     }
 
     /**
-     * {@return the budget of a prism over the whole record}
+     * {@return the budget of a prism over the whole record, if the record holds it}
      *
      * @param set the set
      * @param known what is known of the record
-     * @param prism the prism's place among its prisms
+     * @param prism the prism's name
      */
-    public static BudgetShown whole(OpenSet set, RecordBudget known, int prism) {
-        Period record = set.workbench().periods(Periods.Every.RECORD, 1).get(0);
-        return of(known, prism, record);
+    public static Optional<BudgetShown> whole(OpenSet set, RecordBudget known, String prism) {
+        return of(known, prism, set.workbench().periods(Periods.Every.RECORD, 1).get(0));
     }
 
     private static BudgetShown of(RecordBudget known, int prism, Period period) {

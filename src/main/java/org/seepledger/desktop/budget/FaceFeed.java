@@ -8,6 +8,7 @@ import org.seepledger.desktop.session.Drawing;
 import org.seepledger.desktop.session.FaceFlows;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
+import org.seepledger.desktop.task.PaneState;
 import org.seepledger.io.result.ResultUnits;
 import org.seepledger.ledger.Group;
 import org.seepledger.ledger.Period;
@@ -37,17 +38,23 @@ public final class FaceFeed {
     /** Begins to tell. */
     public void begin() {
         live.known().addListener((known, before, after) -> tell());
+        live.now().addListener((now, before, after) -> tell());
         session.selected().addListener((selected, before, after) -> tell());
         session.interval().addListener((interval, before, after) -> tell());
         reading.rateUnit().addListener((unit, before, after) -> tell());
     }
 
     private void tell() {
-        Optional<OpenSet> set = session.set().get();
+        Optional<OpenSet> set = session.set().get().filter(open -> !hasFailed());
         Optional<Prism> prism = session.selectedPrism();
         session.faceFlows()
                 .set(set.flatMap(open -> prism.flatMap(drawn -> flows(open, drawn)))
                         .orElse(FaceFlows.NONE));
+    }
+
+    /** Old flows must not stand at the sides of a prism that has no budget. */
+    private boolean hasFailed() {
+        return live.now().get().phase() == PaneState.Phase.FAILED;
     }
 
     private Optional<FaceFlows> flows(OpenSet set, Prism prism) {

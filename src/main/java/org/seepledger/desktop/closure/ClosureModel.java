@@ -19,6 +19,8 @@ import org.seepledger.io.result.PrismBudget;
 import org.seepledger.io.result.ResultUnits;
 import org.seepledger.job.RecordBudget;
 import org.seepledger.ledger.Period;
+import org.seepledger.picture.BudgetBlocks;
+import org.seepledger.picture.Picture;
 import org.seepledger.prism.Prism;
 import org.seepledger.report.Answer;
 import org.seepledger.report.CellPlace;
@@ -97,6 +99,26 @@ public final class ClosureModel {
         return live.record();
     }
 
+    /**
+     * {@return the record's gains, losses and storage as blocks to scale, if they are known}
+     *
+     * @param width in logical pixels
+     */
+    public Optional<Picture> blocks(double width) {
+        return session.set()
+                .get()
+                .flatMap(set -> session.selectedPrism()
+                        .flatMap(prism -> live.whole()
+                                .get()
+                                .flatMap(record -> BudgetShown.whole(set, record, prism.name()))
+                                .map(shown -> BudgetBlocks.of(
+                                        prism.name(),
+                                        shown.budget(),
+                                        BudgetBlocks.Flows.NET,
+                                        reading.shown(set),
+                                        Math.max(300, width)))));
+    }
+
     /** Asks the map to show imbalance. */
     public void showImbalance() {
         spots.stream()
@@ -152,7 +174,7 @@ public final class ClosureModel {
             leads.setAll(ClosureLeads.of(set.aquifer(), result));
             result.whereabouts().largest().forEach(cell -> spots.add(spot(set, cell, units)));
         }
-        belongs.set(BudgetShown.whole(set, record, prism).whose(set));
+        belongs.set(BudgetShown.whole(set, record, result.prism()).orElseThrow().whose(set));
     }
 
     private static Spot spot(OpenSet set, HotSpot cell, ResultUnits units) {

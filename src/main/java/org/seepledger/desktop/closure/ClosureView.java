@@ -1,6 +1,7 @@
 package org.seepledger.desktop.closure;
 
 import java.util.List;
+import javafx.beans.value.ObservableValue;
 import javafx.collections.ListChangeListener;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
@@ -12,7 +13,9 @@ import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
+import org.seepledger.desktop.paint.PictureView;
 import org.seepledger.desktop.pane.StatePane;
+import org.seepledger.desktop.theme.Theme;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.report.Answer;
 
@@ -20,15 +23,19 @@ import org.seepledger.report.Answer;
 public final class ClosureView extends BorderPane {
 
     private final ClosureModel model;
+    private final PictureView blocks;
     private final VBox sheet = new VBox();
 
     /**
      * Builds the pane.
      *
      * @param model what it shows
+     * @param theme light or dark
      */
-    public ClosureView(ClosureModel model) {
+    public ClosureView(ClosureModel model, ObservableValue<Theme> theme) {
         this.model = model;
+        this.blocks = new PictureView(model::blocks, theme);
+        blocks.setId("closure-blocks");
         setId("closure");
         sheet.getStyleClass().add("sl-answers");
         Label belongs = new Label();
@@ -54,6 +61,7 @@ public final class ClosureView extends BorderPane {
             if (point.topic() != topic) {
                 topic = point.topic();
                 sheet.getChildren().add(words(topic.question(), "sl-question"));
+                addBlocks(topic);
             }
             sheet.getChildren().add(words(point.text(), "sl-answer"));
             if (isLastOfClosure(point)) {
@@ -68,6 +76,13 @@ public final class ClosureView extends BorderPane {
         if (!sentences.isEmpty()) {
             sheet.getChildren().add(words(title, "sl-question"));
             sentences.forEach(sentence -> sheet.getChildren().add(words(sentence, "sl-answer")));
+        }
+    }
+
+    private void addBlocks(Answer.Topic topic) {
+        if (topic == Answer.Topic.DOMINANT) {
+            blocks.redraw();
+            sheet.getChildren().add(blocks);
         }
     }
 

@@ -38,6 +38,8 @@ public record DraftActions(DraftModel model, DraftHand hand, DraftFiles files, T
                 DRAW, "action.undo", "Shortcut+Z", () -> model.undoable().isPresent(), told(model::undo)));
         all.add(new Action(
                 DRAW, "action.redo", "Shortcut+Shift+Z", () -> model.redoable().isPresent(), told(model::redo)));
+        all.add(action(DRAW, "action.prism.next", "N", () -> model.selectNext(1)));
+        all.add(action(DRAW, "action.prism.before", "Shift+N", () -> model.selectNext(-1)));
         all.add(action(DRAW, "action.vertex.next", "Tab", () -> hand.cycle(1)));
         all.add(action(DRAW, "action.vertex.before", "Shift+Tab", () -> hand.cycle(-1)));
         all.add(action(DRAW, "action.type", "T", tray::focusTyped));

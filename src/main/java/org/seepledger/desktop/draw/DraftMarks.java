@@ -8,6 +8,7 @@ import org.seepledger.picture.Ink;
 import org.seepledger.picture.Mark;
 import org.seepledger.sketch.Crossings;
 import org.seepledger.sketch.Hit;
+import org.seepledger.sketch.Outline;
 import org.seepledger.sketch.Place;
 import org.seepledger.sketch.Shape;
 import org.seepledger.sketch.Snap;
@@ -18,6 +19,10 @@ final class DraftMarks {
     private static final Ink PAPER = Ink.Token.PAPER;
     private static final Ink ACCENT = Ink.Token.ACCENT;
     private static final double VERTEX = 4.2;
+
+    /** Vertices nearer to each other than this would hide what they stand on. */
+    private static final double ROOMY = 22;
+
     private static final double GLYPH = 7;
 
     private final Camera camera;
@@ -40,12 +45,24 @@ final class DraftMarks {
             }
         }
         shape.outlines().forEach((ring, outline) -> {
+            boolean roomy = sideLength(outline) >= ROOMY;
             for (int vertex = 0; vertex < outline.size(); vertex++) {
                 boolean chosen = pick.vertex().equals(Optional.of(new Hit.Vertex(ring, vertex)));
-                vertex(outline.place(vertex), chosen);
+                if (roomy || chosen) {
+                    vertex(outline.place(vertex), chosen);
+                }
             }
         });
         Crossings.of(shape).forEach(crossing -> cross(crossing.place()));
+    }
+
+    /** The mean length of a side on the screen. */
+    private double sideLength(Outline outline) {
+        double length = 0;
+        for (int side = 0; side < outline.size(); side++) {
+            length += outline.place(side).distance(outline.place(side + 1));
+        }
+        return length * camera.scale() / outline.size();
     }
 
     private void vertex(Place place, boolean chosen) {

@@ -1,6 +1,7 @@
 package org.seepledger.desktop.draw;
 
 import java.util.HashMap;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.function.UnaryOperator;
@@ -167,6 +168,21 @@ public final class DraftModel {
     /** {@return the name of the step that can be done again} */
     public Optional<String> redoable() {
         return history.redoable();
+    }
+
+    /**
+     * Selects the next prism in their order, or the one before.
+     *
+     * @param by 1 or -1
+     */
+    public void selectNext(int by) {
+        List<Shape> shapes = drawing().shapes();
+        if (!shapes.isEmpty()) {
+            int place = selected().map(shapes::indexOf).orElse(by > 0 ? -1 : 0);
+            session.lit().set("");
+            session.selected()
+                    .set(shapes.get(Math.floorMod(place + by, shapes.size())).name());
+        }
     }
 
     /** {@return the drawing as it is shown} */

@@ -52,7 +52,7 @@ public final class Folio {
         marks.getStyleClass().add("sl-marks");
         marks.setId("folio-marks");
         add("folio.ledger", new LedgerView(ledger));
-        add("folio.answers", new ClosureView(new ClosureModel(session, live, reading)));
+        add("folio.answers", new ClosureView(new ClosureModel(session, live, reading), theme));
         add("folio.exchange", new ExchangeView(new ExchangeModel(session, live, reading, copies), theme));
         pages.setTop(marks);
         chosen.selectToggle(chosen.getToggles().get(0));

@@ -1,9 +1,13 @@
 package org.seepledger.desktop.ledger;
 
+import java.time.Month;
+import java.time.format.TextStyle;
 import java.util.List;
 import java.util.Locale;
 import java.util.function.Function;
+import java.util.stream.IntStream;
 import javafx.beans.property.Property;
+import javafx.beans.value.ObservableValue;
 import javafx.scene.control.Button;
 import javafx.scene.control.ChoiceBox;
 import javafx.scene.control.Label;
@@ -11,6 +15,7 @@ import javafx.scene.control.Tooltip;
 import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.VBox;
 import javafx.util.StringConverter;
+import org.seepledger.balance.Periods.Every;
 import org.seepledger.desktop.budget.Reading;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.report.Wording;
@@ -26,29 +31,18 @@ final class LedgerChoices extends VBox {
     LedgerChoices(LedgerModel model) {
         this.reading = model.reading();
         getStyleClass().add("sl-choices");
-        Label belongs = new Label();
-        belongs.setId("ledger-belongs");
-        belongs.setWrapText(true);
-        belongs.getStyleClass().add("sl-belongs");
-        belongs.textProperty().bind(model.belongs());
-        Label notes = new Label();
-        notes.setId("ledger-notes");
-        notes.setWrapText(true);
-        notes.getStyleClass().addAll("sl-small", "sl-warning");
-        notes.textProperty().bind(model.notes());
+        Label belongs = line("ledger-belongs", model.belongs(), "sl-belongs");
+        Label notes = line("ledger-notes", model.notes(), "sl-small", "sl-warning");
         notes.managedProperty().bind(notes.textProperty().isNotEmpty());
-        Button copy = new Button(Words.of("ledger.copy"));
-        copy.setId("ledger-copy");
-        copy.setTooltip(new Tooltip(Words.of("ledger.copy.tip")));
-        copy.setOnAction(pressed -> model.copy());
         FlowPane choices = new FlowPane(
                 8,
                 6,
                 periods(),
+                months(),
                 box("ledger-amounts", List.of(false, true), LedgerChoices::amounts, reading.volumes()),
                 units,
                 box("ledger-arrangement", List.of(Arrangement.values()), LedgerChoices::arranged, model.arrangement()),
-                copy);
+                copy(model));
         getChildren().addAll(belongs, notes, choices);
         units.setId("ledger-unit");
         units.setMinWidth(96);
@@ -58,14 +52,44 @@ final class LedgerChoices extends VBox {
         fill();
     }
 
-    private ChoiceBox<org.seepledger.balance.Periods.Every> periods() {
-        var box = box("ledger-period", reading.choices(), LedgerChoices::every, reading.every());
+    private static Label line(String id, ObservableValue<String> text, String... styles) {
+        Label line = new Label();
+        line.setId(id);
+        line.setWrapText(true);
+        line.getStyleClass().addAll(styles);
+        line.textProperty().bind(text);
+        return line;
+    }
+
+    private static Button copy(LedgerModel model) {
+        Button copy = new Button(Words.of("ledger.copy"));
+        copy.setId("ledger-copy");
+        copy.setTooltip(new Tooltip(Words.of("ledger.copy.tip")));
+        copy.setOnAction(pressed -> model.copy());
+        return copy;
+    }
+
+    private ChoiceBox<Every> periods() {
+        ChoiceBox<Every> box = box("ledger-period", reading.choices(), LedgerChoices::every, reading.every());
         box.setMinWidth(112);
         reading.dated().addListener((dated, before, after) -> {
             box.getItems().setAll(reading.choices());
             box.setValue(reading.every().get());
         });
         return box;
+    }
+
+    /** The month in which a water year begins, where water years are chosen. */
+    private ChoiceBox<Integer> months() {
+        List<Integer> all = IntStream.rangeClosed(1, 12).boxed().toList();
+        ChoiceBox<Integer> box = box("ledger-month", all, LedgerChoices::month, reading.waterYearStart());
+        box.visibleProperty().bind(reading.every().isEqualTo(Every.WATER_YEAR));
+        box.managedProperty().bind(box.visibleProperty());
+        return box;
+    }
+
+    private static String month(int month) {
+        return Words.of("ledger.from.month", Month.of(month).getDisplayName(TextStyle.FULL, Locale.ENGLISH));
     }
 
     /** The unit with its powers raised. */
@@ -81,7 +105,7 @@ final class LedgerChoices extends VBox {
         return Words.of("ledger.arranged." + arrangement.name().toLowerCase(Locale.ROOT));
     }
 
-    private static String every(org.seepledger.balance.Periods.Every every) {
+    private static String every(Every every) {
         return Words.of("ledger.every." + every.name().toLowerCase(Locale.ROOT));
     }
 

@@ -39,6 +39,7 @@ public final class LedgerModel {
     private final ObjectProperty<Arrangement> arrangement = new SimpleObjectProperty<>(Arrangement.ITEMS);
     private final ObjectProperty<Order> order = new SimpleObjectProperty<>(Order.AS_DRAWN);
     private double largest;
+    private String whose = "";
 
     /**
      * Makes the model.
@@ -143,7 +144,7 @@ public final class LedgerModel {
 
     /** Copies the rows with their units, in full precision. */
     public void copy() {
-        if (!rows.isEmpty()) {
+        if (!rows.isEmpty() && !belongs.get().isEmpty()) {
             LedgerCopy copy = new LedgerCopy(belongs.get(), unit.get(), rows);
             copies.table(copy.tabSeparated(), copy.html());
             session.status().set(Words.of("ledger.copied", belongs.get()));
@@ -186,18 +187,20 @@ public final class LedgerModel {
                 .orElse(0);
         rows.setAll(arranged);
         unit.set(reading.unitName(set));
-        belongs.set(shown.whose(set));
+        whose = shown.whose(set);
         notes.set(String.join(" ", shown.notes()));
     }
 
     private void clear() {
         rows.clear();
-        belongs.set("");
+        whose = "";
         notes.set("");
     }
 
     private void showState() {
         boolean quick = reading.every().get() == Periods.Every.INTERVAL;
-        state.set(quick ? live.now().get() : live.record().get());
+        PaneState now = quick ? live.now().get() : live.record().get();
+        state.set(now);
+        belongs.set(now.phase() == PaneState.Phase.FAILED ? "" : whose);
     }
 }

@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.Map;
 import org.seepledger.desktop.session.FaceFlows;
 import org.seepledger.picture.Arrow;
+import org.seepledger.picture.Box;
 import org.seepledger.picture.Ink;
 import org.seepledger.picture.Labels;
 import org.seepledger.picture.Mark;
@@ -20,6 +21,7 @@ final class FlowArrows {
 
     private static final double HALF = 20;
     private static final double WIDEST = 14;
+    private static final double CORE = 12;
     private static final double LEAST_SHARE = 0.01;
     private static final double SIZE = 11.5;
 
@@ -56,7 +58,7 @@ final class FlowArrows {
         List<Face> faces = arrows.faces(prism);
         faces.sort(
                 Comparator.comparingDouble((Face face) -> -Math.abs(flows.net().get(face.item()))));
-        faces.forEach(arrows::arrow);
+        faces.forEach(face -> arrows.arrow(face, labels));
         faces.forEach(face -> arrows.label(face, labels));
         return arrows.marks;
     }
@@ -78,7 +80,7 @@ final class FlowArrows {
         return new ArrayList<>(longest.values());
     }
 
-    private void arrow(Face face) {
+    private void arrow(Face face, Labels labels) {
         double net = flows.net().get(face.item());
         double reach = net > 0 ? -HALF : HALF;
         double width = Math.max(1.5, WIDEST * Math.abs(net) / largest);
@@ -89,6 +91,7 @@ final class FlowArrows {
                 face.y() + face.outY() * reach,
                 width);
         marks.add(arrow.mark(fill(net), Mark.Stroke.of(Ink.Token.PAPER, 1.4)));
+        labels.keepFree(new Box(face.x() - CORE, face.y() - CORE, 2 * CORE, 2 * CORE));
     }
 
     private static Mark.Fill fill(double net) {

@@ -2,6 +2,7 @@ package org.seepledger.desktop.map;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import javafx.beans.Observable;
 import javafx.beans.value.ObservableValue;
 import javafx.scene.canvas.Canvas;
@@ -14,13 +15,19 @@ import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.theme.Theme;
+import org.seepledger.job.GroundPicture;
 import org.seepledger.picture.Ink;
 import org.seepledger.picture.Mark;
 
 /** Paints the map, once per frame at most: the ground on one canvas, prisms and letters on another over it. */
 final class MapCanvas extends Region {
 
+    /** How much of a picture the values over it cover. */
+    private static final double OVER_PICTURE = 0.6;
+
     private final MapModel model;
+    private final GroundModel under;
+    private final GroundPainter groundPainter = new GroundPainter();
     private final ObservableValue<Theme> theme;
     private final Canvas ground = new Canvas();
     private final Canvas above = new Canvas();
@@ -33,13 +40,15 @@ final class MapCanvas extends Region {
         List<Mark> marks(Camera camera);
     }
 
-    MapCanvas(MapModel model, Tasks tasks, ObservableValue<Theme> theme) {
+    MapCanvas(MapModel model, GroundModel under, Tasks tasks, ObservableValue<Theme> theme) {
         this.model = model;
+        this.under = under;
         this.theme = theme;
         this.tiles = new Tiles(tasks.each("colouring tiles", 1), this::repaintGround);
         getChildren().addAll(ground, above);
         Session session = model.session();
-        Observable[] under = {
+        Observable[] causes = {
+            under.picture(),
             model.camera(),
             model.values().view(),
             model.values().scale(),
@@ -57,7 +66,7 @@ final class MapCanvas extends Region {
             model.wells(),
             model.overlays().wells()
         };
-        for (Observable cause : under) {
+        for (Observable cause : causes) {
             cause.addListener(changed -> repaintGround());
         }
         for (Observable cause : over) {
@@ -116,7 +125,10 @@ final class MapCanvas extends Region {
         }
         Aquifer aquifer = model.session().set().get().map(OpenSet::aquifer).orElseThrow();
         Camera camera = model.camera().get();
-        tiles.wear(model.values().view().get(), model.values().scale().get());
+        Optional<GroundPicture> picture = under.picture().get();
+        groundPainter.paint(canvas, camera, picture);
+        double opacity = picture.isPresent() ? OVER_PICTURE : 1;
+        tiles.wear(model.values().view().get(), model.values().scale().get(), opacity);
         tiles.pyramid().ifPresent(pyramid -> new TilePainter(canvas, camera, outputScale(), tiles, pyramid).paint());
         MarkPainter painter = new MarkPainter(canvas, theme.getValue());
         if (model.overlays().lines().get()) {

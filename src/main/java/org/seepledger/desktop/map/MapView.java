@@ -23,6 +23,7 @@ public final class MapView extends BorderPane {
     private static final double PER_NOTCH = 1.2;
 
     private final MapModel model;
+    private final GroundModel ground;
     private final MapCanvas canvas;
     private final Hand hand;
     private boolean panning;
@@ -33,22 +34,28 @@ public final class MapView extends BorderPane {
      * Builds the pane.
      *
      * @param model the map
+     * @param ground the picture under it
      * @param tasks colours tiles
      * @param theme gives colours
      * @param hand works on the map
      * @param tray what the hand works with, laid over the map
      */
-    public MapView(MapModel model, Tasks tasks, ObservableValue<Theme> theme, Hand hand, Region tray) {
+    public MapView(
+            MapModel model, GroundModel ground, Tasks tasks, ObservableValue<Theme> theme, Hand hand, Region tray) {
+        this.ground = ground;
         this.model = model;
         this.hand = hand;
-        this.canvas = new MapCanvas(model, tasks, theme);
+        this.canvas = new MapCanvas(model, ground, tasks, theme);
         setId("map");
         canvas.setId("map-canvas");
         canvas.setFocusTraversable(true);
-        canvas.getStyleClass().add("sl-map");
         Legend legend = new Legend(model.values(), theme);
         LayerColumn layers = new LayerColumn(model.session());
-        StackPane stack = new StackPane(canvas, legend, layers, tray);
+        Region ring = new Region();
+        ring.getStyleClass().add("sl-ring");
+        ring.setMouseTransparent(true);
+        ring.visibleProperty().bind(canvas.focusedProperty());
+        StackPane stack = new StackPane(canvas, ring, legend, layers, tray);
         canvas.invite(hand::marks);
         StackPane.setAlignment(legend, Pos.BOTTOM_RIGHT);
         StackPane.setAlignment(layers, Pos.TOP_LEFT);
@@ -170,7 +177,9 @@ public final class MapView extends BorderPane {
                         () -> flip(model.overlays().arrows())),
                 new Action(
                         group, "action.wells", "F4", () -> flip(model.overlays().wells())),
-                new Action(group, "action.fit", "F5", model.values()::fitRange));
+                new Action(group, "action.fit", "F5", model.values()::fitRange),
+                new Action(group, "action.ground", "Shortcut+B", ground::choose),
+                new Action(group, "action.ground.clear", "Shortcut+Shift+B", ground::clear));
     }
 
     private static void flip(javafx.beans.property.BooleanProperty shown) {

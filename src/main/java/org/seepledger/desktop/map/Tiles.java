@@ -23,7 +23,7 @@ final class Tiles {
     private Optional<Coat> coat = Optional.empty();
 
     /** What is coloured, and how. */
-    private record Coat(Pyramid pyramid, ValueScale scale) {}
+    private record Coat(Pyramid pyramid, ValueScale scale, double opacity) {}
 
     Tiles(Lane colouring, Runnable arrived) {
         this.colouring = colouring;
@@ -31,8 +31,8 @@ final class Tiles {
     }
 
     /** Takes other values or colours; the coarsest level is there at once. */
-    void wear(Optional<LayerView> view, Optional<ValueScale> scale) {
-        Optional<Coat> next = view.flatMap(shown -> scale.map(colours -> new Coat(shown.pyramid(), colours)));
+    void wear(Optional<LayerView> view, Optional<ValueScale> scale, double opacity) {
+        Optional<Coat> next = view.flatMap(shown -> scale.map(colours -> new Coat(shown.pyramid(), colours, opacity)));
         if (next.equals(coat)) {
             return;
         }
@@ -78,7 +78,7 @@ final class Tiles {
         for (int row = 0; row < rows; row++) {
             for (int column = 0; column < columns; column++) {
                 float value = level.at(tile.firstRow() + row, tile.firstColumn() + column);
-                argb[row * columns + column] = coat.scale().argb(value, 1);
+                argb[row * columns + column] = coat.scale().argb(value, coat.opacity());
             }
         }
         WritableImage image = new WritableImage(columns, rows);

@@ -1,6 +1,7 @@
 package org.seepledger.desktop.welcome;
 
 import java.io.File;
+import java.nio.file.Path;
 import javafx.collections.ListChangeListener;
 import javafx.collections.ObservableList;
 import javafx.geometry.Pos;
@@ -122,7 +123,7 @@ public final class WelcomeView extends StackPane {
             card.setTooltip(new Tooltip(place.lead()));
             words.getChildren().add(lead);
         }
-        Label where = new Label(place.folder().toString());
+        Label where = new Label(where(place.folder()));
         where.getStyleClass().add("sl-small");
         words.getChildren().add(where);
         card.setGraphic(words);
@@ -132,6 +133,12 @@ public final class WelcomeView extends StackPane {
         words.setPrefWidth(CARD_WIDTH);
         card.setOnAction(pressed -> model.open(place.folder()));
         return card;
+    }
+
+    /** A folder below the one where the program was started is named from there. */
+    private static String where(Path folder) {
+        Path here = Path.of("").toAbsolutePath();
+        return folder.startsWith(here) ? here.relativize(folder).toString() : folder.toString();
     }
 
     private Node dropPlace() {

@@ -7,11 +7,9 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.HashSet;
-import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
-import java.util.function.Consumer;
 import org.seepledger.aquifer.Axis;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.io.JsonFile;
@@ -27,14 +25,11 @@ import org.seepledger.prism.Surroundings;
  * <p>The grid stays whole, and cells outside have no value. Were it cut, each distance from its first edge would be
  * another subtraction of rounded numbers, and a budget of the copy would differ from the original's in its last digits;
  * as it is, they are the same. Tables lose the lines of other cells; rasters keep their shape, and pack well. So
- * {@code aquifer.json} stays as it is, but that a grid like a raster's is written out in numbers, and what this version
- * does not read (of solutes, all but names and porosities) is left out.
+ * {@code aquifer.json} stays as it is, but that a grid like a raster's is written out in numbers.
  */
 public final class AquiferCut {
 
     private static final ObjectMapper MAPPER = new ObjectMapper();
-
-    private static final List<String> READ_OF_SOLUTES = List.of("name", "porosity", "effective_porosity");
 
     private final AquiferFolder folder;
     private final Optional<String> crs;
@@ -72,14 +67,12 @@ public final class AquiferCut {
      * @param crs the grid's coordinate system; empty for local coordinates
      * @param cells the cells whose values stay
      * @param target where its files go
-     * @param notes told of what is left out
      * @throws IOException if a file cannot be read or written
      */
-    public static void write(
-            AquiferFolder folder, Optional<String> crs, Surroundings cells, Target target, Consumer<String> notes)
+    public static void write(AquiferFolder folder, Optional<String> crs, Surroundings cells, Target target)
             throws IOException {
         AquiferCut cut = new AquiferCut(folder, crs, cells);
-        cut.writeDescription(target.file(AquiferReader.FILE), notes);
+        cut.writeDescription(target.file(AquiferReader.FILE));
         Set<String> points = cut.pointsFiles();
         for (Map.Entry<String, Path> input : folder.inputs().entrySet()) {
             if (!input.getKey().equals(AquiferReader.FILE)) {
@@ -110,22 +103,13 @@ public final class AquiferCut {
         return files;
     }
 
-    private void writeDescription(Path file, Consumer<String> notes) throws IOException {
-        boolean solutes = root.has("solutes") || root.path("sources").findValue("concentration") != null;
-        boolean like = root.get("grid").has("like");
-        if (!solutes && !like) {
+    private void writeDescription(Path file) throws IOException {
+        if (!root.get("grid").has("like")) {
             Files.copy(folder.inputs().get(AquiferReader.FILE), file);
             return;
         }
         ObjectNode copy = root.deepCopy();
-        if (like) {
-            copy.set("grid", grid(frame.grid()));
-        }
-        if (solutes) {
-            copy.path("solutes").forEach(solute -> ((ObjectNode) solute).retain(READ_OF_SOLUTES));
-            copy.path("sources").forEach(source -> ((ObjectNode) source).remove("concentration"));
-            notes.accept("Of solutes, names and porosities are copied alone: this version balances water.");
-        }
+        copy.set("grid", grid(frame.grid()));
         Files.writeString(file, MAPPER.writerWithDefaultPrettyPrinter().writeValueAsString(copy) + "\n");
     }
 

@@ -100,7 +100,8 @@ public final class AquiferReader {
                 : Optional.empty();
         Storage storage = storage(root.path("storage"), bindings);
         List<Source> sources = new SourcesReader(bindings, length, time, warnings).read(root.path("sources"));
-        List<Solute> solutes = new SolutesReader(bindings).read(root.path("solutes"));
+        List<Solute> solutes =
+                new SolutesReader(bindings, root.path("sources"), length, time).read(root.path("solutes"));
         String name = root.has("name") ? root.get("name").textValue() : folderName;
         Aquifer aquifer = new Aquifer(name, grid, layers, frame.times(), flow, head, storage, sources, length, time);
         warnOfChoices(aquifer);
@@ -196,9 +197,6 @@ public final class AquiferReader {
     private void warnOfChoices(Aquifer aquifer) {
         if (!root.has("crs")) {
             notes.add("No crs is given; coordinates are taken as local ones in " + length + ".");
-        }
-        if (root.has("solutes")) {
-            notes.add("Solutes are described; this version balances water alone.");
         }
         boolean yieldAlone = aquifer.storage().specificYield().isPresent()
                 && aquifer.storage().specificStorage().isEmpty()

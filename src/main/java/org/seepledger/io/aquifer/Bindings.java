@@ -9,6 +9,7 @@ import java.util.OptionalDouble;
 import java.util.Set;
 import org.seepledger.aquifer.GriddedValues;
 import org.seepledger.fault.DataFault;
+import org.seepledger.io.table.Below;
 import org.seepledger.io.table.Frame;
 import org.seepledger.io.table.GriddedTable;
 import org.seepledger.io.table.Repeats;
@@ -17,6 +18,8 @@ import org.seepledger.unit.Measure;
 
 /** Turns bindings into values, and keeps a list of the quantities that were given. */
 final class Bindings {
+
+    private static final GriddedValues UNMARKED = GriddedValues.constant(Double.NaN);
 
     private final DataFiles files;
     private final Frame frame;
@@ -45,9 +48,23 @@ final class Bindings {
     }
 
     GriddedValues values(String name, JsonNode node, String place, Measure unit, StepKind steps, Repeats repeats) {
-        GriddedValues values = new Binding(place, unit, steps, repeats).read(node);
-        quantities.add(new Quantity(name, unit, steps, values));
+        return listed(name, node, new Binding(place, unit, steps, repeats, Below.REFUSED));
+    }
+
+    /** The values of a quantity at instants, the limit where one is marked to be below it; listed under a name. */
+    GriddedValues marked(String name, JsonNode node, String place, Measure unit) {
+        return listed(name, node, new Binding(place, unit, StepKind.INSTANT, Repeats.REFUSED, Below.AS_LIMIT));
+    }
+
+    private GriddedValues listed(String name, JsonNode node, Binding binding) {
+        GriddedValues values = binding.read(node);
+        quantities.add(new Quantity(name, binding.target, binding.steps, values));
         return values;
+    }
+
+    /** The limits that single values of a quantity are marked to be below; no value elsewhere. */
+    GriddedValues marks(JsonNode node, String place, Measure unit) {
+        return new Binding(place, unit, StepKind.INSTANT, Repeats.REFUSED, Below.LIMIT_ALONE).read(node);
     }
 
     private int steps(StepKind kind) {
@@ -66,15 +83,20 @@ final class Bindings {
         private final Measure target;
         private final StepKind steps;
         private final Repeats repeats;
+        private final Below below;
 
-        Binding(String place, Measure target, StepKind steps, Repeats repeats) {
+        Binding(String place, Measure target, StepKind steps, Repeats repeats, Below below) {
             this.place = place;
             this.target = target;
             this.steps = steps;
             this.repeats = repeats;
+            this.below = below;
         }
 
         GriddedValues read(JsonNode node) {
+            if (below == Below.LIMIT_ALONE && (node.isNumber() || node.has("value"))) {
+                return UNMARKED;
+            }
             if (node.isNumber()) {
                 return new BoundNumber(finite(node.doubleValue()), place, place, Conversion.NONE);
             }
@@ -114,7 +136,7 @@ final class Bindings {
             List<GriddedValues> layers = new ArrayList<>();
             for (int layer = 0; layer < node.size(); layer++) {
                 String inner = KeyPlace.entry(place, layer);
-                layers.add(new Binding(inner, target, steps, repeats).read(node.get(layer)));
+                layers.add(new Binding(inner, target, steps, repeats, below).read(node.get(layer)));
             }
             return new ByLayer(List.copyOf(layers));
         }
@@ -128,7 +150,10 @@ final class Bindings {
                         "Take the placeholder out or use the right one.");
             }
             String first = FileName.of(name, 0, 0);
-            return files.isRaster(first, place) ? raster(name, node) : table(name, node);
+            if (!files.isRaster(first, place)) {
+                return table(name, node);
+            }
+            return below == Below.LIMIT_ALONE ? UNMARKED : raster(name, node);
         }
 
         private String placeholders() {
@@ -197,7 +222,7 @@ final class Bindings {
                         "one table, with columns for layer and time where it needs them",
                         "Name the table and its \"column\".");
             }
-            GriddedTable table = files.table(name, place, frame, repeats);
+            GriddedTable table = files.table(name, place, frame, repeats, below);
             String column = table.column(Optional.ofNullable(node.get("column")).map(JsonNode::textValue));
             Optional<Measure> unit = table.unit(column, unit(node));
             return new ConvertedValues(

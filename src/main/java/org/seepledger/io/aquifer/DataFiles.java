@@ -17,6 +17,7 @@ import org.seepledger.io.raster.GeoTiff;
 import org.seepledger.io.raster.Georeference;
 import org.seepledger.io.raster.GridMatch;
 import org.seepledger.io.raster.RasterFiles;
+import org.seepledger.io.table.Below;
 import org.seepledger.io.table.Frame;
 import org.seepledger.io.table.GriddedTable;
 import org.seepledger.io.table.Repeats;
@@ -103,9 +104,10 @@ public final class DataFiles implements AutoCloseable {
         return systems;
     }
 
-    GriddedTable table(String name, String place, Frame frame, Repeats repeats) {
+    GriddedTable table(String name, String place, Frame frame, Repeats repeats, Below below) {
         Path path = path(name, place);
-        return tables.computeIfAbsent(name + "/" + repeats, key -> GriddedTable.open(path, name, frame, repeats));
+        return tables.computeIfAbsent(
+                name + "/" + repeats + "/" + below, key -> GriddedTable.open(path, name, frame, repeats, below));
     }
 
     /** A note where rasters were matched by their shape alone. */

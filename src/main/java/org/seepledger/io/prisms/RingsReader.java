@@ -85,7 +85,8 @@ final class RingsReader {
         return Place.shown(place.x, place.y);
     }
 
-    private Coordinate vertex(JsonNode vertex, Spot spot) {
+    /** {@return a vertex as it stands in the file} */
+    Coordinate vertex(JsonNode vertex, Spot spot) {
         boolean pair = vertex.isArray()
                 && vertex.size() >= 2
                 && vertex.get(0).isNumber()

@@ -11,15 +11,17 @@ final class GridFiller {
     private final GridLayout layout;
     private final GridValues values;
     private final Repeats repeats;
+    private final Below below;
     private final List<Integer> columns;
     private final DataFault[] faults;
     private final double[] line;
 
-    GridFiller(TableReader table, GridLayout layout, GridValues values, Repeats repeats) {
+    GridFiller(TableReader table, GridLayout layout, GridValues values, Repeats repeats, Below below) {
         this.table = table;
         this.layout = layout;
         this.values = values;
         this.repeats = repeats;
+        this.below = below;
         this.columns = layout.valueColumns();
         this.faults = new DataFault[columns.size()];
         this.line = new double[columns.size()];
@@ -70,7 +72,7 @@ final class GridFiller {
             line[value] = Double.NaN;
             if (faults[value] == null) {
                 try {
-                    line[value] = table.number(columns.get(value));
+                    line[value] = table.number(columns.get(value), below);
                 } catch (DataFault fault) {
                     faults[value] = fault;
                 }

@@ -27,11 +27,12 @@ public final class GriddedTable implements AutoCloseable {
     private final DataFault[] faults;
     private final int gridColumns;
 
-    private GriddedTable(TableReader table, GridLayout layout, Scratch scratch, Frame frame, Repeats repeats) {
+    private GriddedTable(
+            TableReader table, GridLayout layout, Scratch scratch, Frame frame, Repeats repeats, Below below) {
         this.layout = layout;
         this.scratch = scratch;
         this.values = new GridValues(layout, scratch);
-        this.faults = new GridFiller(table, layout, values, repeats).fill();
+        this.faults = new GridFiller(table, layout, values, repeats, below).fill();
         this.gridColumns = frame.grid().columns();
     }
 
@@ -42,19 +43,21 @@ public final class GriddedTable implements AutoCloseable {
      * @param shownName the file as the user named it
      * @param frame what its lines are placed in
      * @param repeats what lines mean that give the same cell, layer and step
+     * @param below what cells mean that begin with {@code <}
      * @throws DataFault if it cannot be read, its header cannot be understood, or a line is not on the grid or, where
      *     that is refused, given twice
      */
-    public static GriddedTable open(Path file, String shownName, Frame frame, Repeats repeats) {
-        return open(file, shownName, frame, repeats, Path.of(System.getProperty("java.io.tmpdir")));
+    public static GriddedTable open(Path file, String shownName, Frame frame, Repeats repeats, Below below) {
+        return open(file, shownName, frame, repeats, below, Path.of(System.getProperty("java.io.tmpdir")));
     }
 
-    static GriddedTable open(Path file, String shownName, Frame frame, Repeats repeats, Path scratchFolder) {
+    static GriddedTable open(
+            Path file, String shownName, Frame frame, Repeats repeats, Below below, Path scratchFolder) {
         try (TableReader table = TableReader.open(file, shownName, Long.MAX_VALUE)) {
             GridLayout layout = new GridLayout(table.header(), frame);
             Scratch scratch = new Scratch(scratchFolder, words(layout, file, shownName, scratchFolder));
             try {
-                return new GriddedTable(table, layout, scratch, frame, repeats);
+                return new GriddedTable(table, layout, scratch, frame, repeats, below);
             } catch (RuntimeException e) {
                 scratch.close();
                 throw e;

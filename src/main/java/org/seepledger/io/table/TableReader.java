@@ -202,6 +202,30 @@ final class TableReader implements AutoCloseable {
     }
 
     /**
+     * {@return the number in a cell of the current line that may be below a limit, NaN where it has none}
+     *
+     * @param column the column
+     * @param below what a cell means that begins with {@code <}
+     * @throws DataFault if it is not a number
+     */
+    double number(int column, Below below) {
+        if (below == Below.REFUSED || !text(column).startsWith("<")) {
+            double value = number(column);
+            return below == Below.LIMIT_ALONE ? Double.NaN : value;
+        }
+        String cell = text(column);
+        try {
+            double limit = decimals.number(cell.substring(1).strip(), "a number after <");
+            if (!Double.isNaN(limit)) {
+                return limit;
+            }
+        } catch (NumberFormatException e) {
+            throw fault(column, Shown.text(cell), e.getMessage(), PLAIN_NUMBERS);
+        }
+        throw fault(column, Shown.text(cell), "a number after <", "Write the limit, as <0.5.");
+    }
+
+    /**
      * {@return what was made of a number in a cell of the current line}
      *
      * @param column the column

@@ -98,6 +98,9 @@ final class BudgetTable {
             case SIDE -> "Sides";
             case LID -> "Lids";
             case SOURCE -> "Sources";
+            case DISPERSION -> "Dispersion";
+            case DECAY -> "Decay";
+            case PRODUCTION -> "Production";
             case STORAGE -> "Storage";
             case TOTAL -> "Totals";
         };

@@ -3,6 +3,7 @@ package org.seepledger.desktop.budget;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import org.junit.jupiter.api.AfterEach;
@@ -17,8 +18,6 @@ import org.seepledger.desktop.task.HeldTasks;
 import org.seepledger.desktop.task.PaneState.Phase;
 import org.seepledger.job.IntervalBudget;
 import org.seepledger.prism.Prism;
-import org.seepledger.prism.Ring;
-import org.seepledger.prism.Side;
 
 /** The budget follows the hand and never runs behind for ever. */
 class LiveBudgetTest {
@@ -54,19 +53,9 @@ class LiveBudgetTest {
 
     /** The first prism with all its vertices moved to the east. */
     private List<Prism> moved(double distance) {
-        Prism first = prisms.get(0);
-        List<Ring> rings = first.rings().stream()
-                .map(ring -> new Ring(
-                        ring.part(),
-                        ring.island(),
-                        ring.sides().stream()
-                                .map(side -> new Side(side.name(), side.item(), side.x() + distance, side.y()))
-                                .toList()))
-                .toList();
-        Prism moved = new Prism(first.name(), rings, first.range());
-        return java.util.stream.Stream.concat(
-                        java.util.stream.Stream.of(moved), prisms.stream().skip(1))
-                .toList();
+        List<Prism> drawn = new ArrayList<>(prisms);
+        drawn.set(0, LiveSet.moved(prisms.get(0), distance));
+        return drawn;
     }
 
     private IntervalBudget now() {
@@ -158,6 +147,7 @@ class LiveBudgetTest {
 
     @Test
     void whatCannotBeBalancedIsSaidInWordsAndMendedByTheNextDrawing() {
+        new FaceFeed(session, live, reading).begin();
         show();
         tasks.all();
         draw(moved(1e6), true);
@@ -165,10 +155,12 @@ class LiveBudgetTest {
         assertThat(live.now().get().phase()).isEqualTo(Phase.FAILED);
         assertThat(live.now().get().words()).contains("well field", "outside the grid");
         assertThat(live.record().get().phase()).isEqualTo(Phase.FAILED);
+        assertThat(session.faceFlows().get()).isEqualTo(FaceFlows.NONE);
         draw(prisms, true);
         tasks.all();
         assertThat(live.now().get().phase()).isEqualTo(Phase.READY);
         assertThat(live.record().get().phase()).isEqualTo(Phase.READY);
+        assertThat(session.faceFlows().get().prism()).isEqualTo("well field");
     }
 
     @Test

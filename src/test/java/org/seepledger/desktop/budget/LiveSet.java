@@ -10,6 +10,8 @@ import org.seepledger.desktop.session.Opening;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.task.DirectTasks;
 import org.seepledger.prism.Prism;
+import org.seepledger.prism.Ring;
+import org.seepledger.prism.Side;
 
 /** A sample with its prisms, the first selected, and its budgets worked out, as view models see them. */
 public final class LiveSet implements AutoCloseable {
@@ -49,6 +51,19 @@ public final class LiveSet implements AutoCloseable {
     /** The terrace: specific discharge at cell centres; it does not close. */
     public static LiveSet terrace() {
         return new LiveSet(Path.of("sample-aquifers/terrace"));
+    }
+
+    /** A prism with all its vertices moved to the east. */
+    public static Prism moved(Prism prism, double distance) {
+        List<Ring> rings = prism.rings().stream()
+                .map(ring -> new Ring(
+                        ring.part(),
+                        ring.island(),
+                        ring.sides().stream()
+                                .map(side -> new Side(side.name(), side.item(), side.x() + distance, side.y()))
+                                .toList()))
+                .toList();
+        return new Prism(prism.name(), rings, prism.range());
     }
 
     @Override

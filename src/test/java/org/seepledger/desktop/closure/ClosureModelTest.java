@@ -17,6 +17,8 @@ class ClosureModelTest {
             assertThat(model.points().get(0).text()).startsWith("Closes to rounding: less than ");
             assertThat(model.spots()).isEmpty();
             assertThat(model.leads()).isEmpty();
+            assertThat(model.blocks(480).orElseThrow().title())
+                    .isEqualTo("Gains, losses and storage of well field, record");
             assertThat(model.belongs().get()).startsWith("well field").endsWith("record, 2021-10-01 to 2023-10-01");
         }
     }

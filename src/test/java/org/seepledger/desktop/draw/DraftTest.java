@@ -287,6 +287,15 @@ class DraftTest {
     }
 
     @Test
+    void prismsAreSelectedOneAfterAnother() {
+        model.selectNext(-1);
+        assertThat(session.selected().get())
+                .isEqualTo(model.drawing().shapes().get(3).name());
+        model.selectNext(1);
+        assertThat(session.selected().get()).isEqualTo("well field");
+    }
+
+    @Test
     void keysCycleAndNudgeVertices() {
         assertThat(hand.nudge(1, 0)).isFalse();
         hand.cycle(1);

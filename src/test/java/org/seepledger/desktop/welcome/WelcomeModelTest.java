@@ -35,8 +35,8 @@ class WelcomeModelTest {
         model.look(List.of(Path.of(""), Path.of("target/..")));
         assertThat(model.samples())
                 .extracting(Place::title)
-                .containsExactly("Invented river terrace", "Invented valley");
-        assertThat(model.samples().get(1).lead())
+                .containsExactly("Invented depot", "Invented river terrace", "Invented valley");
+        assertThat(model.samples().get(2).lead())
                 .isEqualTo("A river meanders down a valley that rock closes on all sides.");
     }
 

@@ -21,7 +21,7 @@ class GriddedTableFaultTest {
 
     private GriddedTable open(String text, Frame frame, Repeats repeats) {
         Path file = Tables.file(folder, text.replace('@', '\n'));
-        return GriddedTable.open(file, "t.csv", frame, repeats, folder);
+        return GriddedTable.open(file, "t.csv", frame, repeats, Below.REFUSED, folder);
     }
 
     private void openAndClose(String text) {

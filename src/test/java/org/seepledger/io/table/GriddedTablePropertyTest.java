@@ -53,7 +53,8 @@ class GriddedTablePropertyTest {
         Frame frame = new Frame(grid, layers, new Times(instants, Tables.DAY, Optional.empty()));
         double[][][] values = new double[layers][intervals][grid.window().size()];
         String text = table(random, grid, values);
-        try (GriddedTable table = GriddedTable.open(Tables.file(folder, text), "t", frame, Repeats.REFUSED, folder)) {
+        try (GriddedTable table =
+                GriddedTable.open(Tables.file(folder, text), "t", frame, Repeats.REFUSED, Below.REFUSED, folder)) {
             for (int layer = 0; layer < layers; layer++) {
                 for (int step = 0; step < intervals; step++) {
                     double[] read = Tables.plane(table.values("q", StepKind.INTERVAL), frame, layer, step);
@@ -135,7 +136,8 @@ class GriddedTablePropertyTest {
     }
 
     private void readGridded(Path file) {
-        try (GriddedTable table = GriddedTable.open(file, "t.csv", Tables.FRAME, Repeats.REFUSED, folder)) {
+        try (GriddedTable table =
+                GriddedTable.open(file, "t.csv", Tables.FRAME, Repeats.REFUSED, Below.REFUSED, folder)) {
             for (String column : table.columns()) {
                 table.unit(column);
                 Tables.plane(table.values(column, StepKind.INTERVAL), Tables.FRAME, 1, 2);

@@ -27,7 +27,7 @@ class GriddedTableTest {
     private Path folder;
 
     private GriddedTable open(String text, Frame frame, Repeats repeats) {
-        return GriddedTable.open(Tables.file(folder, text), "data/t.csv", frame, repeats, folder);
+        return GriddedTable.open(Tables.file(folder, text), "data/t.csv", frame, repeats, Below.REFUSED, folder);
     }
 
     private GriddedTable open(String text) {

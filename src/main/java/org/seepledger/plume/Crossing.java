@@ -1,0 +1,67 @@
+package org.seepledger.plume;
+
+import java.util.stream.IntStream;
+import org.seepledger.aquifer.Solute;
+import org.seepledger.ledger.Period;
+import org.seepledger.prism.Pieces;
+import org.seepledger.prism.Transect;
+
+/**
+ * What crosses a transect of one solute: water and mass by interval, piece and layer.
+ *
+ * @param transect the transect
+ * @param solute the solute
+ * @param pieces how the grid cuts it
+ * @param layers the number of layers
+ * @param areas area by interval and panel, length²; panel = piece × layers + layer
+ * @param flows water by interval and panel, length³/time, positive forward
+ * @param rates mass by interval, {@link NonDetects} and panel, kg/time, positive forward
+ */
+public record Crossing(
+        Transect transect,
+        Solute solute,
+        Pieces pieces,
+        int layers,
+        double[][] areas,
+        double[][] flows,
+        double[][][] rates) {
+
+    static Crossing empty(Transect transect, Solute solute, Pieces pieces, int layers, int intervals) {
+        int panels = pieces.count() * layers;
+        return new Crossing(
+                transect,
+                solute,
+                pieces,
+                layers,
+                new double[intervals][panels],
+                new double[intervals][panels],
+                new double[intervals][NonDetects.values().length][panels]);
+    }
+
+    /**
+     * {@return what crosses in a period, means over it}
+     *
+     * @param period the period
+     * @param choice how non-detects count
+     * @param segment a segment, from 0; -1 for all
+     * @param layer a layer, from 0; -1 for all
+     */
+    public Panels panels(Period period, NonDetects choice, int segment, int layer) {
+        int[] wanted = IntStream.range(0, pieces.count() * layers)
+                .filter(panel -> segment < 0 || pieces.side(panel / layers) == segment)
+                .filter(panel -> layer < 0 || panel % layers == layer)
+                .toArray();
+        double[] area = new double[wanted.length];
+        double[] flow = new double[wanted.length];
+        double[] rate = new double[wanted.length];
+        for (Period.Part part : period.parts()) {
+            double share = part.duration() / period.duration();
+            for (int i = 0; i < wanted.length; i++) {
+                area[i] += share * areas[part.interval()][wanted[i]];
+                flow[i] += share * flows[part.interval()][wanted[i]];
+                rate[i] += share * rates[part.interval()][choice.ordinal()][wanted[i]];
+            }
+        }
+        return new Panels(area, flow, rate);
+    }
+}
