@@ -44,8 +44,7 @@ final class ClosureWords {
 
     private String overTheRecord() {
         if (!result.storageKnown()) {
-            return "Closure cannot be judged: change in storage is not known. Inflow less outflow, storage included,"
-                    + " is "
+            return "Closure cannot be judged: change in storage is not known. Inflow less outflow, storage included, is "
                     + wording.rate(totals.inflow() - totals.outflow(), time) + ".";
         }
         if (totals.throughput() == 0) {
@@ -72,8 +71,8 @@ final class ClosureWords {
         if (through >= THROUGH_FLOW * totals.throughput()) {
             sentences.add("Of that throughput, "
                     + wording.percent(100 * through / totals.throughput())
-                    + " goes in and out again through the same items, at other places or times; for sides, how much"
-                    + " depends on how they are drawn. The closure error set against net flow leaves it out.");
+                    + " goes in and out again through the same items, at other places or times; for sides, how much depends"
+                    + " on how they are drawn. The closure error set against net flow leaves it out.");
         }
     }
 }

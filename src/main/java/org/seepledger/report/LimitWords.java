@@ -38,10 +38,10 @@ final class LimitWords {
         if (result.storageKnown()) {
             sentences.add(
                     result.closesToRounding()
-                            ? "That it closes to rounding proves the arithmetic and that flow, sources and storage"
-                                    + " belong together; it does not prove that any of them is right."
-                            : "A small closure error would not prove that the terms are right, nor does a large one"
-                                    + " tell which of them is wrong.");
+                            ? "That it closes to rounding proves the arithmetic and that flow, sources and storage belong"
+                                    + " together; it does not prove that any of them is right."
+                            : "A small closure error would not prove that the terms are right, nor does a large one tell"
+                                    + " which of them is wrong.");
         }
         return sentences;
     }

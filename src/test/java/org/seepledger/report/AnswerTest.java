@@ -96,8 +96,8 @@ class AnswerTest {
                 .containsExactly(
                         "Closure error 5.00 % of throughput (12.50 % of net flow): 5 m3/d of 100 m3/d is unexplained.",
                         "Of that throughput, 60.00 % goes in and out again through the same items, at other places or"
-                                + " times; for sides, how much depends on how they are drawn. The closure error set"
-                                + " against net flow leaves it out.");
+                                + " times; for sides, how much depends on how they are drawn. The closure error set against"
+                                + " net flow leaves it out.");
         assertThat(says(Topic.LIMITS)).last().asString().startsWith("A small closure error would not prove");
     }
 
@@ -148,10 +148,10 @@ class AnswerTest {
                 .row(Group.SOURCE, "well", 0, 90);
         assertThat(says(Topic.DOMINANT))
                 .containsExactly(
-                        "Of all gains, 100 m3/d gross, the largest are side 1 (50 m3/d, 50.00 %), top lid (30 m3/d,"
-                                + " 30.00 %) and rain (20 m3/d, 20.00 %).",
-                        "Of all losses, 100 m3/d gross, the largest are well (90 m3/d, 90.00 %) and top lid (10 m3/d,"
-                                + " 10.00 %).");
+                        "Of all gains, 100 m3/d gross, the largest are side 1 (50 m3/d, 50.00 %), top lid (30 m3/d, 30.00 %)"
+                                + " and rain (20 m3/d, 20.00 %).",
+                        "Of all losses, 100 m3/d gross, the largest are well (90 m3/d, 90.00 %) and top lid (10 m3/d, 10.00"
+                                + " %).");
     }
 
     @Test
@@ -205,8 +205,8 @@ class AnswerTest {
                         "Net flow smaller than one stated standard deviation of the gross flow, so that not even its"
                                 + " direction is certain: side 1 (net 10 m3/d, standard deviation 20 m3/d).",
                         // √(20² + 12² + 5²)
-                        "Stated uncertainties, added as squares as if they were independent, come to 23.85 m3/d, 15.90"
-                                + " % of throughput; a difference smaller than that tells nothing.");
+                        "Stated uncertainties, added as squares as if they were independent, come to 23.85 m3/d, 15.90 % of"
+                                + " throughput; a difference smaller than that tells nothing.");
     }
 
     @Test
@@ -214,9 +214,9 @@ class AnswerTest {
         origins.set(0, new Provenance("flow", "", "", "1 %"));
         row(Group.SIDE, "side 1", 100, 0).row(Group.SIDE, "side 2", 0, 80);
         assertThat(says(Topic.LIMITS))
-                .anyMatch(sentence -> sentence.endsWith(
-                        "What is unexplained is more than that: errors are larger than stated, or something is"
-                                + " missing."));
+                .anyMatch(
+                        sentence -> sentence.endsWith(
+                                "What is unexplained is more than that: errors are larger than stated, or something is missing."));
     }
 
     @Test
