@@ -4,7 +4,6 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
-import java.util.Optional;
 import org.seepledger.picture.Mark.Anchor;
 import org.seepledger.picture.Mark.Fill;
 import org.seepledger.picture.Mark.Stroke;
@@ -133,17 +132,15 @@ final class BlockSheet {
     private void outline(double x, double wide, double one, double other) {
         if (Math.abs(one - other) >= VISIBLE) {
             Box box = new Box(x, Math.min(one, other), wide, Math.abs(one - other));
-            marks.add(new Mark.Area(List.of(box.ring()), Optional.empty(), Optional.of(Stroke.of(Ink.Token.TEXT, 1))));
+            marks.add(Mark.Area.of(box, Stroke.of(Ink.Token.TEXT, 1)));
         }
     }
 
     private Drawn openBlock(Block gap, double x) {
         double upper = Math.min(y(gap.from()), y(gap.to()));
         double high = Math.max(2, Math.abs(y(gap.from()) - y(gap.to())));
-        marks.add(new Mark.Area(
-                List.of(new Box(x, upper, block, high).ring()),
-                Optional.empty(),
-                Optional.of(Stroke.of(gap.ink(), 1.6).dashed(5.0, 4.0))));
+        marks.add(Mark.Area.of(
+                new Box(x, upper, block, high), Stroke.of(gap.ink(), 1.6).dashed(5.0, 4.0)));
         return new Drawn(gap, x + block, upper + high / 2);
     }
 

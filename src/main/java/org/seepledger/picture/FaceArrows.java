@@ -14,7 +14,6 @@ import org.seepledger.picture.Mark.Stroke;
 import org.seepledger.prism.Prism;
 import org.seepledger.prism.Ring;
 import org.seepledger.prism.Side;
-import org.seepledger.unit.Figures;
 
 /**
  * The net flow through each lateral face as an arrow across its longest side: inward for a gain, outward for a loss, its
@@ -61,8 +60,12 @@ final class FaceArrows {
             net = Double.isNaN(net) ? flow : net + flow;
         }
 
+        NetFlow flow() {
+            return new NetFlow(net);
+        }
+
         double size() {
-            return Double.isNaN(net) ? 0 : Math.abs(net);
+            return flow().size();
         }
     }
 
@@ -110,34 +113,29 @@ final class FaceArrows {
     private static void arrow(MapSheet sheet, Face face, double largest) {
         double x = sheet.frame().x(face.x);
         double y = sheet.frame().y(face.y);
-        Stroke rim = Stroke.of(Ink.Token.PAPER, 1);
         if (isSmall(face, largest)) {
             sheet.above(new Mark.Area(
-                    List.of(MapSheet.round(x, y, 2)), Optional.of(Fill.of(Ink.Token.PRISM)), Optional.of(rim)));
+                    List.of(MapSheet.round(x, y, 2)),
+                    Optional.of(Fill.of(Ink.Token.PRISM)),
+                    Optional.of(Stroke.of(Ink.Token.PAPER, 1))));
             sheet.labels().keepFree(new Box(x - 2, y - 2, 4, 4));
             return;
         }
-        double reach = LENGTH / 2 * (face.net > 0 ? -1 : 1);
         double width = Math.max(1.2, WIDEST * face.size() / largest);
-        double alongX = face.outwardX * reach;
-        double alongY = -face.outwardY * reach;
-        Arrow arrow = new Arrow(x - alongX, y - alongY, x + alongX, y + alongY, width);
-        Fill fill = face.net > 0 ? Fill.of(Ink.Token.GAIN) : new Fill(Ink.Token.LOSS, 1, Mark.Texture.RISING);
-        sheet.above(arrow.mark(fill, face.net > 0 ? rim : Stroke.of(Ink.Token.LOSS, 1)));
-        double half = Math.max(Math.abs(alongX), Math.abs(alongY));
+        double outX = face.outwardX * LENGTH / 2;
+        double outY = -face.outwardY * LENGTH / 2;
+        sheet.above(face.flow().arrow(x, y, outX, outY, width));
+        double half = Math.max(Math.abs(outX), Math.abs(outY));
         double room = 0.6 * half + width / 2;
         sheet.labels().keepFree(new Box(x - room, y - room, 2 * room, 2 * room));
     }
 
     private static void label(MapSheet sheet, Face face, double largest) {
-        String flow = Double.isNaN(face.net)
-                ? "–"
-                : face.net == 0 ? "0" : (face.net > 0 ? "in " : "out ") + Figures.typeset(Math.abs(face.net));
-        String words = face.item + ": " + flow;
+        String words = face.item + ": " + face.flow().words();
         double x = sheet.frame().x(face.x);
         double y = sheet.frame().y(face.y);
         boolean small = isSmall(face, largest);
-        Ink ink = small ? Ink.Token.MUTED : face.net > 0 ? Ink.Token.GAIN : Ink.Token.LOSS;
+        Ink ink = small ? Ink.Token.MUTED : face.flow().ink();
         List<Mark.Text> choices = new ArrayList<>();
         for (double gap : small ? new double[] {6} : new double[] {LENGTH / 2 + 4, LENGTH / 2 + 16}) {
             double outX = x + face.outwardX * gap;

@@ -39,11 +39,13 @@ public final class MapPicture {
      *
      * @param values what is shown as colours
      * @param scale which colour a value has
-     * @param title what it is
+     * @param quantity what it is
      * @param unit its unit
+     * @param layer the layer's name
      * @param contoured whether lines of equal value are drawn
      */
-    public record Ground(Drape values, ValueScale scale, String title, String unit, boolean contoured) {}
+    public record Ground(
+            Drape values, ValueScale scale, String quantity, String unit, String layer, boolean contoured) {}
 
     private MapPicture(Aquifer aquifer, Prism subject, List<Prism> others, Optional<Ground> ground, double width) {
         this.aquifer = aquifer;
@@ -123,8 +125,8 @@ public final class MapPicture {
         return map.picture(
                 ground,
                 "Map of " + subject.name() + " with the flow through its faces",
-                "Arrows across the faces point inward where water comes in and outward where it leaves; their widths are in"
-                        + " proportion to net flow in " + unit.words() + ".");
+                "Arrows across the faces point inward where water comes in and outward where it leaves; their widths"
+                        + " are in proportion to net flow in " + unit.words() + ".");
     }
 
     /**
@@ -183,8 +185,8 @@ public final class MapPicture {
         marks.addAll(bar.marks(box.x() + NorthArrow.WIDTH + GAP, strip + 8));
         double left = box.x() + NorthArrow.WIDTH + bar.width() + 3 * GAP;
         Box room = new Box(left, strip, Math.min(LEGEND, box.right() - left), RampLegend.LEVEL_HEIGHT);
-        ground.ifPresent(under -> marks.addAll(
-                RampLegend.level(under.scale(), opacity(under), under.title() + ", " + under.unit(), room)));
+        ground.ifPresent(under -> marks.addAll(RampLegend.level(
+                under.scale(), opacity(under), under.quantity() + ", " + under.unit() + ": " + under.layer(), room)));
         return new Picture(width, height, title, description, marks);
     }
 

@@ -164,7 +164,7 @@ final class MapSheet {
         List<Mark> marks = new ArrayList<>();
         marks.add(new Mark.Group(box, ground));
         marks.addAll(above);
-        marks.add(new Mark.Area(List.of(box.ring()), Optional.empty(), Optional.of(Stroke.of(Ink.Token.MUTED, 1))));
+        marks.add(Mark.Area.of(box, Stroke.of(Ink.Token.MUTED, 1)));
         Ticks east = Ticks.within(frame.west(), frame.east(), MOST_TICKS);
         for (int i = 0; i < east.count(); i++) {
             double x = frame.x(east.values().get(i));

@@ -107,6 +107,16 @@ public sealed interface Mark permits Mark.Line, Mark.Area, Mark.Text, Mark.Image
         public static Area of(Box box, Fill fill) {
             return new Area(List.of(box.ring()), Optional.of(fill), Optional.empty());
         }
+
+        /**
+         * {@return the outline of a rectangle}
+         *
+         * @param box where it is
+         * @param stroke how it is drawn
+         */
+        public static Area of(Box box, Stroke stroke) {
+            return new Area(List.of(box.ring()), Optional.empty(), Optional.of(stroke));
+        }
     }
 
     /** Which part of a text stands at its place. */

@@ -2,7 +2,6 @@ package org.seepledger.picture;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Optional;
 import org.seepledger.picture.Mark.Anchor;
 import org.seepledger.picture.Mark.Stroke;
 
@@ -15,7 +14,6 @@ public final class RampLegend {
     private static final double SIZE = 11;
     private static final double STRIP = 12;
     private static final double TICK = 4;
-    private static final double ENDS = 26;
     private static final int COLOURS = 256;
 
     private final ValueScale scale;
@@ -37,7 +35,7 @@ public final class RampLegend {
         RampLegend legend = new RampLegend(scale);
         Box strip = new Box(place.x(), place.y() + 17, place.width(), STRIP);
         legend.marks.add(title(words, place));
-        legend.strip(strip, new double[] {strip.width() / COLOURS, 0, 0, STRIP, strip.x(), strip.y()}, false, opacity);
+        legend.strip(strip, new double[] {strip.width() / COLOURS, 0, 0, STRIP, strip.x(), strip.y()}, opacity);
         Labels labels = new Labels(new Box(place.x() - 2, strip.bottom() - 2, place.width() + 4, 34));
         Ticks ticks = levelTicks(scale, place.width());
         for (int i = 0; i < ticks.count(); i++) {
@@ -48,28 +46,6 @@ public final class RampLegend {
             if (labels.place(List.of(Mark.Text.of(middle, base, ticks.label(i), SIZE, Anchor.MIDDLE)), legend.marks)) {
                 legend.tick(x, strip.bottom(), x, strip.bottom() + TICK);
             }
-        }
-        return legend.marks;
-    }
-
-    /**
-     * {@return a legend that stands upright, the greatest value uppermost}
-     *
-     * @param scale which colour a value has
-     * @param words what the values are, with their unit
-     * @param place where it goes; its width is at least {@link #uprightWidth}, its height at least 80
-     */
-    public static List<Mark> upright(ValueScale scale, String words, Box place) {
-        RampLegend legend = new RampLegend(scale);
-        Box strip = new Box(place.x(), place.y() + 20, STRIP, place.height() - ENDS);
-        legend.marks.add(title(words, place));
-        legend.strip(strip, new double[] {STRIP, 0, 0, strip.height() / COLOURS, strip.x(), strip.y()}, true, 1);
-        Ticks ticks = uprightTicks(scale, strip.height());
-        for (int i = 0; i < ticks.count(); i++) {
-            double y = strip.bottom() - scale.share(ticks.values().get(i)) * strip.height();
-            legend.tick(strip.right(), y, strip.right() + TICK, y);
-            double x = strip.right() + TICK + 3;
-            legend.marks.add(Mark.Text.of(x, y + 0.35 * SIZE, ticks.label(i), SIZE, Anchor.START));
         }
         return legend.marks;
     }
@@ -88,38 +64,18 @@ public final class RampLegend {
         return best;
     }
 
-    /**
-     * {@return how wide an upright legend must be for its numbers}
-     *
-     * @param scale which colour a value has
-     * @param height how high it is
-     */
-    public static double uprightWidth(ValueScale scale, double height) {
-        Ticks ticks = uprightTicks(scale, height - ENDS);
-        double widest = 0;
-        for (int i = 0; i < ticks.count(); i++) {
-            widest = Math.max(widest, Lettering.width(ticks.label(i), SIZE));
-        }
-        return Math.ceil(STRIP + TICK + 3 + widest);
-    }
-
-    private static Ticks uprightTicks(ValueScale scale, double length) {
-        return scale.ticks(Math.max(3, (int) (length / 28)));
-    }
-
     private static Mark.Text title(String words, Box place) {
         return Mark.Text.of(
                 place.x(), place.y() + 11, Lettering.fitted(words, SIZE, place.width()), SIZE, Anchor.START);
     }
 
-    private void strip(Box strip, double[] placement, boolean upright, double opacity) {
+    private void strip(Box strip, double[] placement, double opacity) {
         int[] colours = new int[COLOURS];
         for (int i = 0; i < COLOURS; i++) {
-            double share = (i + 0.5) / COLOURS;
-            colours[i] = scale.argb(scale.at(upright ? 1 - share : share), opacity);
+            colours[i] = scale.argb(scale.at((i + 0.5) / COLOURS), opacity);
         }
-        marks.add(new Mark.Image(upright ? 1 : COLOURS, upright ? COLOURS : 1, colours, placement));
-        marks.add(new Mark.Area(List.of(strip.ring()), Optional.empty(), Optional.of(Stroke.of(Ink.Token.MUTED, 1))));
+        marks.add(new Mark.Image(COLOURS, 1, colours, placement));
+        marks.add(Mark.Area.of(strip, Stroke.of(Ink.Token.MUTED, 1)));
     }
 
     private void tick(double fromX, double fromY, double toX, double toY) {

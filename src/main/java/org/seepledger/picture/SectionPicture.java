@@ -6,7 +6,6 @@ import java.util.Optional;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.PlacedWell;
 import org.seepledger.aquifer.Screen;
-import org.seepledger.ledger.Entry;
 import org.seepledger.ledger.Group;
 import org.seepledger.ledger.PeriodBudget;
 import org.seepledger.picture.Mark.Fill;
@@ -32,6 +31,9 @@ public final class SectionPicture {
 
     /** Wells are shown up to this share of the line's length beside it. */
     private static final double NEARBY = 0.04;
+
+    private static final double LID_REACH = 12;
+    private static final double LID_WIDTH = 5;
 
     private final Aquifer aquifer;
     private final SectionLine line;
@@ -164,46 +166,47 @@ public final class SectionPicture {
                         sheet.over());
     }
 
-    /** The net flow through a lid as an arrow into the body or out of it, in the middle of the longest cut. */
+    /** The net flow through a lid as an arrow into the body or out of it, in the middle of the cut. */
     private void drawLid(PeriodBudget budget, String lid, UnitShown unit) {
-        double net = 0;
-        boolean known = false;
-        for (Entry entry : budget.entries()) {
-            boolean ours = entry.account().group() == Group.LID
-                    && entry.account().item().equals(lid);
-            if (ours && entry.account().quantified()) {
-                net += unit.of(entry.net(), budget.period());
-                known = true;
-            }
-        }
+        Optional<NetFlow> flow = flow(budget, lid, unit);
         Optional<Stretch> middle = middle();
-        if (!known || middle.isEmpty()) {
+        if (flow.isEmpty() || middle.isEmpty()) {
             return;
         }
         double x = (sheet.x(middle.get().from()) + sheet.x(middle.get().to())) / 2;
         boolean isTop = lid.equals("top");
         double y = sheet.y(isTop ? middle.get().top() : middle.get().bottom());
-        double reach = (isTop ? -1 : 1) * (net > 0 ? -1 : 1) * 12;
-        String words = lid + ": " + (net == 0 ? "0" : (net > 0 ? "in " : "out ") + Figures.typeset(Math.abs(net)));
-        Ink ink = net > 0 ? Ink.Token.GAIN : net < 0 ? Ink.Token.LOSS : Ink.Token.MUTED;
-        if (net != 0) {
-            Fill fill = net > 0 ? Fill.of(ink) : new Fill(ink, 1, Mark.Texture.RISING);
-            sheet.over()
-                    .add(new Arrow(x, y - reach, x, y + reach, 5)
-                            .mark(fill, Stroke.of(net > 0 ? Ink.Token.PAPER : ink, 1)));
-            sheet.labels().keepFree(new Box(x - 8, y - 13, 16, 26));
+        if (flow.get().size() > 0) {
+            sheet.over().add(flow.get().arrow(x, y, 0, isTop ? -LID_REACH : LID_REACH, LID_WIDTH));
+            sheet.labels().keepFree(new Box(x - 8, y - LID_REACH - 1, 16, 2 * LID_REACH + 2));
         }
         List<Mark.Text> choices = new ArrayList<>();
         for (int side : new int[] {1, -1}) {
             for (double shift : new double[] {isTop ? -4 : 11, isTop ? 11 : -4}) {
                 Mark.Anchor anchor = side > 0 ? Mark.Anchor.START : Mark.Anchor.END;
-                choices.add(Mark.Text.of(x + 11 * side, y + shift, words, SMALL, anchor)
+                choices.add(Mark.Text.of(
+                                x + 11 * side,
+                                y + shift,
+                                lid + ": " + flow.get().words(),
+                                SMALL,
+                                anchor)
                         .strong()
                         .haloed()
-                        .in(ink));
+                        .in(flow.get().ink()));
             }
         }
         sheet.labels().place(choices, sheet.over());
+    }
+
+    /** The net flow through a lid, if it can be given. */
+    private static Optional<NetFlow> flow(PeriodBudget budget, String lid, UnitShown unit) {
+        return budget.entries().stream()
+                .filter(entry -> entry.account().group() == Group.LID
+                        && entry.account().item().equals(lid)
+                        && entry.account().quantified())
+                .map(entry -> unit.of(entry.net(), budget.period()))
+                .reduce(Double::sum)
+                .map(NetFlow::new);
     }
 
     /** The stretch in the middle of those that lie in the prism. */
@@ -217,7 +220,8 @@ public final class SectionPicture {
         Box box = sheet.box();
         double y = box.bottom() + 36;
         double x = box.x();
-        if (aquifer.head().isPresent()) {
+        if (profile.stretches().stream()
+                .anyMatch(stretch -> Double.isFinite(stretch.column().levelAtEnd()))) {
             marks.add(new Mark.Line(new double[] {x, y - 3, x + 22, y - 3}, AT_END));
             boolean moves = aquifer.head().get().changes();
             String level = moves ? "water level, end of record" : "water level";

@@ -150,7 +150,7 @@ final class SectionSheet {
         marks.add(new Mark.Group(box, inside));
         marks.addAll(over);
         Stroke thin = Stroke.of(Ink.Token.MUTED, 1);
-        marks.add(new Mark.Area(List.of(box.ring()), Optional.empty(), Optional.of(thin)));
+        marks.add(Mark.Area.of(box, thin));
         Ticks up = Ticks.within(lowest, highest, 6);
         for (int i = 0; i < up.count(); i++) {
             double y = y(up.values().get(i));

@@ -127,7 +127,7 @@ class MapPictureTest {
             return values;
         });
         ValueScale scale = ValueScale.over(drape.values());
-        MapPicture.Ground ground = new MapPicture.Ground(drape, scale, "head", "m", true);
+        MapPicture.Ground ground = new MapPicture.Ground(drape, scale, "head", "m", "sand", true);
         Picture map = MapPicture.ofFaces(
                 Scene.aquifer(),
                 PRISM,
@@ -167,7 +167,7 @@ class MapPictureTest {
     void cellsThatDoNotBalanceAreNumberedWhereTheyAre() {
         Drape drape = Drape.of(Scene.GRID, Scene.GRID.window(), 100, row -> new double[30]);
         MapPicture.Ground ground =
-                new MapPicture.Ground(drape, ValueScale.aboutZero(drape.values()), "Imbalance", "m3/d", false);
+                new MapPicture.Ground(drape, ValueScale.aboutZero(drape.values()), "imbalance", "m3/d", "sand", false);
         Picture map = MapPicture.ofImbalance(
                 Scene.aquifer(), PRISM, ground, List.of(new HotSpot(0, 10, 12, 3), new HotSpot(0, 7, 20, -2)), WIDTH);
         MapFrame frame = MapPicture.frame(PRISM, WIDTH);

@@ -127,8 +127,11 @@ public final class ReportPictures {
         Window window = MapPicture.frame(prism, WIDTH).window(grid);
         Drape drape = Drape.of(head.orElseGet(() -> aquifer.surface(layer)), layer, step, grid, window, MOST_CELLS);
         String what = head.isEmpty() ? "top" : step > 0 ? "head at the end of the record" : "head";
-        String title = aquifer.layers().get(layer).name() + ", " + what;
-        return new Ground(drape, ValueScale.over(drape.values()), title, length, true);
+        return new Ground(drape, ValueScale.over(drape.values()), what, length, name(layer), true);
+    }
+
+    private String name(int layer) {
+        return aquifer.layers().get(layer).name();
     }
 
     private Picture imbalance(Prism prism, PrismResult result) {
@@ -137,8 +140,8 @@ public final class ReportPictures {
         Imbalance imbalance = balance.imbalance();
         Drape drape =
                 Drape.of(aquifer.grid(), imbalance.window(), MOST_CELLS, row -> scaled(imbalance.row(layer, row)));
-        String title = aquifer.layers().get(layer).name() + ", imbalance of cells";
-        Ground ground = new Ground(drape, ValueScale.aboutZero(drape.values()), title, rate.words(), false);
+        ValueScale scale = ValueScale.aboutZero(drape.values());
+        Ground ground = new Ground(drape, scale, "imbalance of cells", rate.words(), name(layer), false);
         List<HotSpot> inLayer =
                 spots.stream().filter(spot -> spot.layer() == layer).toList();
         return MapPicture.ofImbalance(aquifer, prism, ground, inLayer, WIDTH);
