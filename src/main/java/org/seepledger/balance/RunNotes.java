@@ -12,6 +12,7 @@ import org.seepledger.aquifer.PlacedWell;
 import org.seepledger.prism.Overlap;
 import org.seepledger.prism.PrismCut;
 import org.seepledger.prism.Side;
+import org.seepledger.prism.VerticalRange;
 import org.seepledger.prism.WellCut;
 
 /**
@@ -56,13 +57,15 @@ public record RunNotes(
     public record ClosedSide(String prism, String side, String item, boolean empty) {}
 
     /**
-     * A well in a cell that a prism cuts.
+     * A well in a cell that a prism's sides cut, or held by a prism whose lids may cut its cells.
      *
      * @param prism the prism
      * @param well the well
-     * @param inside whether the prism holds it
+     * @param inside whether the prism holds it in plan
+     * @param bySides whether the prism's sides cut its cell
+     * @param byLids whether the prism's lids lie at elevations, so that a part of its cells may count
      */
-    public record CutWell(String prism, String well, boolean inside) {}
+    public record CutWell(String prism, String well, boolean inside, boolean bySides, boolean byLids) {}
 
     /** Copies the collections. */
     public RunNotes {
@@ -100,7 +103,8 @@ public record RunNotes(
             if (aquifer.flow().closedSides()) {
                 addClosedSides(closed, name, accounts.cut());
             }
-            accounts.wells().forEach((well, cut) -> addCutWell(wells, name, well, cut));
+            boolean byLids = accounts.cut().prism().range() instanceof VerticalRange.Elevations;
+            accounts.wells().forEach((well, cut) -> addCutWell(wells, name, well, cut, byLids));
         }
         return new RunNotes(
                 overlaps, inactive, closed, wells, total.uncounted(), total.still(), total.mismatch(), disagreement);
@@ -117,9 +121,10 @@ public record RunNotes(
         }
     }
 
-    private static void addCutWell(List<CutWell> wells, String prism, PlacedWell well, WellCut cut) {
-        if (cut.share() > 0 && cut.share() < 1) {
-            wells.add(new CutWell(prism, well.well().name(), cut.inside()));
+    private static void addCutWell(List<CutWell> wells, String prism, PlacedWell well, WellCut cut, boolean byLids) {
+        boolean bySides = cut.share() > 0 && cut.share() < 1;
+        if (bySides || byLids && cut.inside()) {
+            wells.add(new CutWell(prism, well.well().name(), cut.inside(), bySides, byLids));
         }
     }
 }

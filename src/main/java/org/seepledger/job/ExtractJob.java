@@ -115,7 +115,8 @@ public final class ExtractJob {
         text.append("Written to ").append(request.out()).append(": ");
         text.append(files).append(" files, all named in run.json.\n");
         text.append("Strike its budget with: seepledger balance ").append(request.out());
-        text.append(" --prisms ").append(request.out().resolve(prisms)).append(" --out DIR\n");
+        text.append(" --prisms ").append(request.out().resolve(prisms)).append(" --out DIR");
+        text.append(request.clip() ? " --clip\n" : "\n");
         return text.toString();
     }
 }

@@ -90,9 +90,9 @@ final class Plausibility {
         boolean high = range.greatest() * factor > published.greatest();
         if (low || high) {
             double value = low ? range.least() : range.greatest();
-            doubts.add("\"" + range.name() + "\" is " + Figures.shown(value) + " " + range.unit() + " at "
+            doubts.add("\"" + range.name() + "\" is " + Figures.shown(value) + unit(range.unit()) + " at "
                     + (low ? range.leastAt() : range.greatestAt()) + ": outside the widest published range, "
-                    + published.least() + " to " + published.greatest() + " " + published.unit() + " ("
+                    + published.least() + " to " + published.greatest() + unit(published.unit()) + " ("
                     + published.source() + ").");
         }
     }
@@ -138,9 +138,14 @@ final class Plausibility {
         return Math.max(Math.abs(range.least()), Math.abs(range.greatest()));
     }
 
+    /** A unit after its number; nothing for what has none. */
+    private static String unit(String unit) {
+        return unit.equals("1") ? "" : " " + unit;
+    }
+
     private static String shown(ValueRange range) {
         boolean least = Math.abs(range.least()) > Math.abs(range.greatest());
-        return Figures.shown(least ? range.least() : range.greatest()) + " " + range.unit() + " at "
+        return Figures.shown(least ? range.least() : range.greatest()) + unit(range.unit()) + " at "
                 + (least ? range.leastAt() : range.greatestAt());
     }
 }

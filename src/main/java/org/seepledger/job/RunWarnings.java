@@ -134,13 +134,7 @@ final class RunWarnings {
                     + Figures.shown(area.area()) + " " + aquifer.lengthUnit()
                     + "2 are inactive or without thickness and take no part.");
         }
-        for (RunNotes.CutWell well : notes.cutWells()) {
-            String counted = rule == WellRule.SPREAD
-                    ? "by the share of its cell inside"
-                    : well.inside() ? "in full" : "not at all";
-            remarks.add("Well \"" + well.well() + "\" stands in a cell that \"" + well.prism() + "\" cuts; it counts "
-                    + counted + ".");
-        }
+        notes.cutWells().forEach(well -> remarks.add(counted(well, rule)));
         for (Map.Entry<String, Uncounted> source : notes.uncounted().entrySet()) {
             if (source.getValue().missing() > 0) {
                 remarks.add("\"" + source.getKey() + "\" has no value in up to "
@@ -148,6 +142,19 @@ final class RunWarnings {
             }
         }
         return remarks;
+    }
+
+    private static String counted(RunNotes.CutWell well, WellRule rule) {
+        String between = "the part of its screened cells' water that lies between the prism's lids";
+        String place = "Well \"" + well.well() + "\" stands in ";
+        if (!well.bySides()) {
+            return place + "\"" + well.prism() + "\", whose lids lie at elevations; it counts for " + between + ".";
+        }
+        String share =
+                rule == WellRule.SPREAD ? "by the share of its cell inside" : well.inside() ? "in full" : "not at all";
+        boolean lids = well.byLids() && (well.inside() || rule == WellRule.SPREAD);
+        return place + "a cell that \"" + well.prism() + "\" cuts; it counts " + share
+                + (lids ? ", but only for " + between : "") + ".";
     }
 
     private String rate(double value) {

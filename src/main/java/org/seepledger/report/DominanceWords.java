@@ -45,6 +45,19 @@ final class DominanceWords {
         boolean stored = terms.stream().anyMatch(term -> term.group() == Group.STORAGE);
         sentences.add("Of all " + what + (stored ? ", " + storage + " storage among them, " : ", ")
                 + wording.rate(all, time) + " gross, the largest " + (largest.size() == 1 ? "is " : "are ")
-                + Wording.listed(largest) + ".");
+                + Wording.listed(largest) + "." + throughFaces(terms, volume, all));
+    }
+
+    /** All faces together, where there are more of them than are named: alone each may be small. */
+    private String throughFaces(List<Term> terms, ToDoubleFunction<Term> volume, double all) {
+        List<Term> faces = terms.stream()
+                .filter(term -> term.group() == Group.SIDE || term.group() == Group.LID)
+                .toList();
+        double sum = faces.stream().mapToDouble(volume).sum();
+        return faces.size() <= NAMED
+                ? ""
+                : " All " + faces.size() + " faces together have "
+                        + wording.rate(sum, result.record().period().duration()) + " ("
+                        + wording.percent(100 * sum / all) + ").";
     }
 }

@@ -2,9 +2,12 @@ package org.seepledger.report;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.OptionalDouble;
+import java.util.stream.Collectors;
 import org.seepledger.ledger.Group;
 import org.seepledger.ledger.Totals;
+import org.seepledger.unit.Figures;
 
 /** What a budget cannot carry, in words: terms that drown in the residual or in their own uncertainty, and what closure does not show. */
 final class LimitWords {
@@ -77,7 +80,7 @@ final class LimitWords {
 
     private void addBelowUncertainty(List<String> sentences) {
         List<String> names = Term.bySize(terms).stream()
-                .filter(term -> term.gross() > 0 && Math.abs(term.net()) < deviation(term))
+                .filter(term -> flows(term) && Math.abs(term.net()) < deviation(term))
                 .map(term -> term.name() + " (net " + wording.rate(term.net(), time) + ", standard deviation "
                         + wording.rate(deviation(term), time) + ")")
                 .toList();
@@ -94,7 +97,7 @@ final class LimitWords {
     }
 
     private void addCombined(List<String> sentences) {
-        List<Term> flowing = terms.stream().filter(term -> term.gross() > 0).toList();
+        List<Term> flowing = terms.stream().filter(this::flows).toList();
         List<Term> stating =
                 flowing.stream().filter(term -> !Double.isNaN(deviation(term))).toList();
         List<String> silent = flowing.stream()
@@ -105,15 +108,39 @@ final class LimitWords {
             sentences.add("No uncertainty is stated in percent for any of its terms, so that none can be weighed.");
             return;
         }
-        double combined = Math.sqrt(stating.stream()
-                .mapToDouble(term -> deviation(term) * deviation(term))
+        double combined = combined(stating);
+        sentences.add(
+                "Stated uncertainties, all faces taken as one term and all storage as one, then added as squares as if"
+                        + " they were independent, come to "
+                        + wording.rate(combined, time) + ", " + wording.percent(100 * combined / totals.throughput())
+                        + " of throughput; a difference smaller than that tells nothing." + against(combined)
+                        + (silent.isEmpty()
+                                ? ""
+                                : " Nothing is in it of " + Wording.listed(silent) + ", which state none in percent."));
+    }
+
+    /** Terms that rest on the same statement err together: how many sides are drawn must not matter. */
+    private double combined(List<Term> stating) {
+        Map<String, List<Term>> together = stating.stream()
+                .collect(Collectors.groupingBy(term -> switch (term.group()) {
+                    case SIDE, LID -> "faces";
+                    case STORAGE -> "storage";
+                    default -> "source " + term.item();
+                }));
+        return Math.sqrt(together.values().stream()
+                .mapToDouble(terms -> Math.pow(deviation(terms), 2))
                 .sum());
-        sentences.add("Stated uncertainties, added as squares as if they were independent, come to "
-                + wording.rate(combined, time) + ", " + wording.percent(100 * combined / totals.throughput())
-                + " of throughput; a difference smaller than that tells nothing." + against(combined)
-                + (silent.isEmpty()
-                        ? ""
-                        : " Nothing is in it of " + Wording.listed(silent) + ", which state none in percent."));
+    }
+
+    private double deviation(List<Term> together) {
+        double inflow = together.stream().mapToDouble(Term::inflow).sum();
+        double outflow = together.stream().mapToDouble(Term::outflow).sum();
+        return origins.percent(together.get(0)).orElseThrow() / 100 * Math.max(inflow, outflow);
+    }
+
+    /** Whether more than rounding goes through a term. */
+    private boolean flows(Term term) {
+        return Figures.withoutRounding(term.gross(), totals.throughput()) > 0;
     }
 
     private String against(double combined) {

@@ -34,6 +34,9 @@ public record PrismResult(
     /** Below this, in percent, a closure error is rounding and nothing else. */
     static final double ROUNDING_PERCENT = 1e-9;
 
+    /** Imbalances that add up to less than this share of throughput change no figure of the budget. */
+    private static final double LOCATED = 1e-8;
+
     /** Copies the lists. */
     public PrismResult {
         periods = List.copyOf(periods);
@@ -66,9 +69,7 @@ public record PrismResult(
     /** {@return whether there are cells whose imbalance is more than rounding, and storage that would excuse it is known} */
     public boolean isWorthLocating() {
         double throughput = record.totals().throughput() / record.period().duration();
-        return storageKnown()
-                && !whereabouts.largest().isEmpty()
-                && whereabouts.magnitude() > ROUNDING_PERCENT / 100 * throughput;
+        return storageKnown() && !whereabouts.largest().isEmpty() && whereabouts.magnitude() > LOCATED * throughput;
     }
 
     /** {@return whether change in storage can be given, and with it a residual} */

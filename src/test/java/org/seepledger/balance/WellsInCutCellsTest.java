@@ -179,7 +179,8 @@ class WellsInCutCellsTest {
                 WaterBalance.of(aquifer(12, 5), List.of(cutting, missing, whole), WellRule.POINT, 1, Progress.NONE);
         assertThat(balance.notes().cutWells())
                 .containsExactly(
-                        new RunNotes.CutWell("cutting", "P", true), new RunNotes.CutWell("missing", "P", false));
+                        new RunNotes.CutWell("cutting", "P", true, true, false),
+                        new RunNotes.CutWell("missing", "P", false, true, false));
     }
 
     @Test

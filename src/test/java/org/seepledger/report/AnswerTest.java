@@ -204,9 +204,35 @@ class AnswerTest {
                 .contains(
                         "Net flow smaller than one stated standard deviation of the gross flow, so that not even its"
                                 + " direction is certain: side 1 (net 10 m3/d, standard deviation 20 m3/d).",
-                        // √(20² + 12² + 5²)
-                        "Stated uncertainties, added as squares as if they were independent, come to 23.85 m3/d, 15.90 % of"
-                                + " throughput; a difference smaller than that tells nothing.");
+                        // √((20 % of 150)² + 5²)
+                        "Stated uncertainties, all faces taken as one term and all storage as one, then added as squares as"
+                                + " if they were independent, come to 30.41 m3/d, 20.28 % of throughput; a difference smaller"
+                                + " than that tells nothing.");
+    }
+
+    @Test
+    void howManySidesAreDrawnDoesNotMatterToWhatIsUncertain() {
+        origins.set(0, new Provenance("flow", "simulated", "", "20 %"));
+        row(Group.SIDE, "north", 40, 0).row(Group.SIDE, "east", 60, 0).row(Group.SIDE, "south", 0, 100);
+        assertThat(says(Topic.LIMITS))
+                .anyMatch(sentence -> sentence.contains("come to 20 m3/d, 20.00 % of throughput"));
+    }
+
+    @Test
+    void manyFacesAreSummedWhereEachIsSmall() {
+        row(Group.SIDE, "a", 10, 0)
+                .row(Group.SIDE, "b", 9, 0)
+                .row(Group.SIDE, "c", 8, 0)
+                .row(Group.SIDE, "d", 13, 0);
+        row(Group.SOURCE, "rain", 20, 0).row(Group.SOURCE, "wells", 0, 60);
+        assertThat(says(Topic.DOMINANT)).first().asString().endsWith("All 4 faces together have 40 m3/d (66.67 %).");
+    }
+
+    @Test
+    void roundingIsNotAskedForItsDirection() {
+        origins.set(0, new Provenance("flow", "simulated", "", "20 %"));
+        row(Group.SIDE, "side 1", 100, 0).row(Group.SIDE, "side 2", 0, 100).row(Group.LID, "top", 1e-15, 1e-15);
+        assertThat(says(Topic.LIMITS)).noneMatch(sentence -> sentence.contains("direction"));
     }
 
     @Test

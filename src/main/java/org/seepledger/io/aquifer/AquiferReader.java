@@ -74,11 +74,19 @@ public final class AquiferReader {
 
     private static DataFault noSet(Path folder) {
         boolean exists = Files.isDirectory(folder);
-        Optional<String> near = exists ? Optional.empty() : NearestName.besides(folder);
+        boolean file = Files.isRegularFile(folder) && folder.toAbsolutePath().getParent() != null;
+        Optional<String> near = exists
+                ? Optional.empty()
+                : file
+                        ? Optional.of(folder.toAbsolutePath()
+                                .getParent()
+                                .getFileName()
+                                .toString())
+                        : NearestName.besides(folder);
         return new DataFault(
                 folder.toString(),
                 "",
-                exists ? "no " + FILE : "no such folder",
+                exists ? "no " + FILE : file ? "a file" : "no such folder",
                 "an aquifer folder with " + FILE,
                 near.map(name -> "Did you mean \"" + name + "\"?")
                         .orElse("Name the folder that holds it; docs/formats.md says how it is made."));
