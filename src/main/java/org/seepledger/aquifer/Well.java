@@ -1,9 +1,11 @@
 package org.seepledger.aquifer;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 
 /**
  * A point source with its schedule: all lines of one name, place, screen and category.
@@ -36,6 +38,21 @@ public record Well(String name, String category, double x, double y, Screen scre
         return grouped.entrySet().stream()
                 .map(entry -> entry.getKey().withSchedule(entry.getValue()))
                 .toList();
+    }
+
+    /** {@return a line of the schedule that begins before an earlier one ends, so that their rates add; empty if none does} */
+    public Optional<PointRate> overlapping() {
+        List<PointRate> inTime = schedule.stream()
+                .sorted(Comparator.comparingDouble(PointRate::from))
+                .toList();
+        double end = Double.NEGATIVE_INFINITY;
+        for (PointRate line : inTime) {
+            if (line.from() < end) {
+                return Optional.of(line);
+            }
+            end = Math.max(end, line.to());
+        }
+        return Optional.empty();
     }
 
     private Well withSchedule(List<PointRate> lines) {

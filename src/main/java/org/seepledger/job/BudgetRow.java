@@ -186,7 +186,8 @@ record BudgetRow(Prism prism, Period period, Item item, int account) {
             String name, String what, String written, Optional<String> near, List<String> known) {
         String remedy = near.map(nearest -> " The nearest is \"" + nearest + "\".")
                 .orElse(known.size() > MOST_LISTED ? "" : " There are \"" + String.join("\", \"", known) + "\".");
+        String choice = what.equals("period") ? " Which periods there are is for --every or --periods to say." : "";
         return new UsageFault(
-                "--row \"" + name + "\": there is no " + what + " \"" + written + "\"." + remedy + " " + FORM);
+                "--row \"" + name + "\": there is no " + what + " \"" + written + "\"." + remedy + choice + " " + FORM);
     }
 }

@@ -34,6 +34,20 @@ class WellTest {
         return Well.of(lines).get(0);
     }
 
+    @Test
+    void linesForTheSameTimeAreTold() {
+        assertThat(scheduled(0, 10, 5, 10, 20, 6).overlapping()).isEmpty();
+        assertThat(scheduled(10, 20, 6, 0, 10, 5).overlapping()).isEmpty();
+        assertThat(scheduled(0, 11, 5, 10, 20, 6).overlapping())
+                .map(PointRate::from)
+                .contains(10.0);
+        assertThat(scheduled(0, 30, 5, 1, 2, 6, 20, 40, 7).overlapping())
+                .map(PointRate::from)
+                .contains(1.0);
+        assertThat(scheduled(-ALWAYS, ALWAYS, 5, -ALWAYS, ALWAYS, 6).overlapping())
+                .isPresent();
+    }
+
     private static List<WellRate> rates(AquiferDraft draft, Well well) {
         Aquifer aquifer =
                 draft.source(new Source.Points("pumping", List.of(well))).done();

@@ -54,6 +54,13 @@ class InspectTest {
     }
 
     @Test
+    void tellsOfScheduleLinesForTheSameTime() {
+        assertThat(warnings(files().with("sources", "[{'category': 'pumping', 'kind': 'points', 'file': 'w.csv'}]")
+                        .file("w.csv", "name,x,y,layer,from,to,rate\nP,5,5,1,0,12,-1\nP,5,5,1,10,20,-2\n")))
+                .contains("w.csv, line 3: the well \"P\" has another line for the same time; their rates add.");
+    }
+
+    @Test
     void writesNothing() {
         inspected(files());
         assertThat(files().left()).containsExactly("aquifer", "prisms.geojson");

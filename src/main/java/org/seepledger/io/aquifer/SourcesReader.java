@@ -61,15 +61,21 @@ final class SourcesReader {
     }
 
     private Source points(String category, String file, String place, Measure rate) {
-        return new Source.Points(
+        List<Well> wells = Well.of(PointsTable.read(
+                bindings.files().path(file, KeyPlace.key(place, "file")),
+                file,
                 category,
-                Well.of(PointsTable.read(
-                        bindings.files().path(file, KeyPlace.key(place, "file")),
-                        file,
-                        category,
-                        bindings.frame(),
-                        length,
-                        rate,
-                        warnings::add)));
+                bindings.frame(),
+                length,
+                rate,
+                warnings::add));
+        for (Well well : wells) {
+            well.overlapping()
+                    .ifPresent(
+                            line -> warnings.add(
+                                    line.place() + ": the well \"" + well.name()
+                                            + "\" has another line for the same time; their rates add. Let one end where the next begins."));
+        }
+        return new Source.Points(category, wells);
     }
 }
