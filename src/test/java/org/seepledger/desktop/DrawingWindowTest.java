@@ -6,10 +6,7 @@ import static org.assertj.core.api.Assertions.within;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.List;
-import java.util.Map;
 import java.util.Optional;
-import java.util.stream.Collectors;
 import javafx.geometry.Bounds;
 import javafx.geometry.Point2D;
 import javafx.scene.Node;
@@ -20,17 +17,9 @@ import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
-import org.seepledger.balance.Periods;
-import org.seepledger.balance.WaterBalance;
-import org.seepledger.balance.WellRule;
+import org.seepledger.desktop.ledger.Arrangement;
 import org.seepledger.desktop.map.Camera;
-import org.seepledger.desktop.session.FaceFlows;
 import org.seepledger.desktop.session.Opening;
-import org.seepledger.job.Workbench;
-import org.seepledger.ledger.Group;
-import org.seepledger.ledger.PeriodBudget;
-import org.seepledger.prism.Prism;
-import org.seepledger.progress.Progress;
 import org.seepledger.sketch.Drawing;
 import org.seepledger.sketch.Place;
 import org.seepledger.sketch.RingAt;
@@ -89,40 +78,21 @@ class DrawingWindowTest {
     }
 
     @Test
-    void aPrismDrawnByHandHasTheBudgetThatTheCommandGivesForItsFileDigitForDigit() {
+    void aPrismDrawnByHandHasTheBudgetThatTheCommandGivesForItsFileDigitForDigit() throws IOException {
         drawPrism();
         assertThat(drawing().outline(RingAt.outer("prism")).size()).isEqualTo(4);
         assertThat(window.robot.lookup("#status").queryAs(Label.class).getText())
                 .contains("Click a prism");
         window.await(() -> window.assembly().session().faceFlows().get().prism().equals("prism"));
-        FaceFlows shown = window.assembly().session().faceFlows().get();
         Path file = folder.resolve("drawn.geojson");
         window.answers.paths.add(Optional.of(file));
         type(KeyCode.CONTROL, KeyCode.SHIFT, KeyCode.S);
         window.await(() -> Files.exists(file));
-        try (Workbench bench = Workbench.open(folder)) {
-            Prism prism = bench.read(file).prisms().get(4);
-            assertThat(window.assembly().session().selectedPrism()).contains(prism);
-            Map<String, Double> expected = bySide(bench, prism);
-            assertThat(shown.net().keySet()).isEqualTo(expected.keySet());
-            expected.forEach((side, net) ->
-                    assertThat(shown.net().get(side)).as(side).isCloseTo(net, within(1e-12 * Math.abs(net))));
-        }
-    }
-
-    /** Net rates of the first interval as the command strikes them; layers are added up in another order here. */
-    private static Map<String, Double> bySide(Workbench bench, Prism prism) {
-        PeriodBudget budget = WaterBalance.of(bench.aquifer(), List.of(prism), WellRule.POINT, 1, Progress.NONE)
-                .ledgers()
-                .get(0)
-                .budget(new Periods(bench.aquifer().times())
-                        .every(Periods.Every.INTERVAL, 1)
-                        .get(0));
-        double length = bench.aquifer().times().length(0);
-        return budget.entries().stream()
-                .filter(entry -> entry.account().group() == Group.SIDE)
-                .collect(Collectors.groupingBy(
-                        entry -> entry.account().item(), Collectors.summingDouble(entry -> entry.net() / length)));
+        window.choose("#ledger-arrangement", Arrangement.ITEMS_BY_LAYER);
+        window.robot.clickOn("#ledger-copy");
+        assertThat(CommandRows.copied(window.answers.copied.get(0)))
+                .hasSizeGreaterThan(10)
+                .isEqualTo(CommandRows.ofCommand(folder, file, folder.resolve("out"), "prism", "interval 1"));
     }
 
     @Test

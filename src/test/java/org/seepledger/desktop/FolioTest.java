@@ -10,7 +10,6 @@ import java.util.List;
 import java.util.stream.Collectors;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
-import javafx.scene.control.ChoiceBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.TableView;
 import javafx.scene.input.KeyCode;
@@ -25,14 +24,11 @@ import org.seepledger.desktop.ledger.LedgerRow;
 import org.seepledger.desktop.map.Camera;
 import org.seepledger.desktop.session.Drawing;
 import org.seepledger.desktop.session.Session;
-import org.seepledger.job.BalanceJob;
 import org.seepledger.job.MapQuantity;
-import org.seepledger.job.Requests;
 import org.seepledger.prism.Prism;
 import org.seepledger.prism.Ring;
 import org.seepledger.prism.Side;
 import org.seepledger.prism.VerticalRange;
-import org.seepledger.progress.Progress;
 
 /** The budget's panes in the real window. */
 class FolioTest {
@@ -85,18 +81,6 @@ class FolioTest {
                 .isPresent();
     }
 
-    private <T> void choose(String selector, T value) {
-        @SuppressWarnings("unchecked")
-        ChoiceBox<T> box = window.robot.lookup(selector).queryAs(ChoiceBox.class);
-        window.robot.clickOn(box);
-        int steps = box.getItems().indexOf(value) - box.getItems().indexOf(box.getValue());
-        for (int i = 0; i < Math.abs(steps); i++) {
-            window.robot.type(steps > 0 ? KeyCode.DOWN : KeyCode.UP);
-        }
-        window.robot.type(KeyCode.ENTER);
-        window.await(() -> value.equals(box.getValue()));
-    }
-
     @Test
     void aClickOnAHeaderSortsAndOnARowLightsTheFaceUp() {
         openSet(VALLEY);
@@ -113,13 +97,13 @@ class FolioTest {
     void theLedgerSaysWhoseItIsInTheUnitAndPeriodChosen() {
         openSet(VALLEY);
         assertThat(text("#ledger-belongs")).startsWith("well field").contains("interval 1, 2021-10-01");
-        choose("#ledger-unit", "L/s");
-        choose("#ledger-period", Periods.Every.RECORD);
+        window.choose("#ledger-unit", "L/s");
+        window.choose("#ledger-period", Periods.Every.RECORD);
         window.await(() -> text("#ledger-belongs").contains("record, 2021-10-01 to 2023-10-01"));
         window.robot.clickOn("#ledger-copy");
         assertThat(window.answers.copied.get(0)).contains("\tL/s").startsWith("well field");
-        choose("#ledger-period", Periods.Every.WATER_YEAR);
-        choose("#ledger-month", 4);
+        window.choose("#ledger-period", Periods.Every.WATER_YEAR);
+        window.choose("#ledger-month", 4);
         window.await(() -> text("#ledger-belongs").contains("water year 2022, 2021-10-01 to 2022-04-01"));
     }
 
@@ -191,33 +175,15 @@ class FolioTest {
         }
         Prism dropped = LiveSet.moved(first, 3.7 * 12);
         draw(List.of(dropped), true);
-        choose("#ledger-arrangement", org.seepledger.desktop.ledger.Arrangement.ITEMS_BY_LAYER);
+        window.choose("#ledger-arrangement", org.seepledger.desktop.ledger.Arrangement.ITEMS_BY_LAYER);
         window.robot.interact(() -> session().interval().set(4));
         window.await(() -> text("#ledger-belongs").contains("interval 5,")
                 && window.assembly().session().faceFlows().get().revision()
                         == session().drawing().get().revision());
         window.robot.clickOn("#ledger-copy");
-        assertThat(nets(window.answers.copied.get(0))).isEqualTo(commandsNets(folder, dropped, "interval 5"));
-    }
-
-    /** Net rates of faces, sources and storage, in the order of rows. */
-    private static List<String> nets(String copied) {
-        return copied.lines()
-                .map(line -> line.split("\t", -1))
-                .filter(cells -> cells.length == 5 && cells[4].equals("m3/d") && !cells[1].isEmpty())
-                .map(cells -> cells[1] + " " + cells[2] + " " + cells[3])
-                .toList();
-    }
-
-    private static List<String> commandsNets(Path folder, Prism prism, String period) throws IOException {
-        Path prisms = folder.resolve("prisms.geojson");
-        Files.writeString(prisms, geoJson(prism));
-        BalanceJob.run(Requests.byInterval(VALLEY, prisms, folder.resolve("out")), Progress.NONE);
-        return Files.readAllLines(folder.resolve("out/budget.csv")).stream()
-                .map(line -> line.split(",", -1))
-                .filter(cells -> cells.length == 17 && cells[1].equals(period) && !cells[6].equals("total"))
-                .map(cells -> cells[9] + " " + cells[10] + " " + cells[11])
-                .toList();
+        Path prisms = Files.writeString(folder.resolve("prisms.geojson"), geoJson(dropped));
+        assertThat(CommandRows.copied(window.answers.copied.get(0)))
+                .isEqualTo(CommandRows.ofCommand(VALLEY, prisms, folder.resolve("out"), dropped.name(), "interval 5"));
     }
 
     private static String geoJson(Prism prism) {

@@ -6,6 +6,8 @@ import java.util.concurrent.Callable;
 import java.util.concurrent.TimeUnit;
 import java.util.function.BooleanSupplier;
 import javafx.application.Platform;
+import javafx.scene.control.ChoiceBox;
+import javafx.scene.input.KeyCode;
 import javafx.stage.Stage;
 import org.seepledger.desktop.port.GivenAnswers;
 import org.seepledger.desktop.task.BackgroundTasks;
@@ -67,6 +69,19 @@ public final class OpenWindow implements AutoCloseable {
             throw new AssertionError("waited in vain", e);
         }
         WaitForAsyncUtils.waitForFxEvents();
+    }
+
+    /** Chooses a value from a choice box, by click and keys. */
+    <T> void choose(String selector, T value) {
+        @SuppressWarnings("unchecked")
+        ChoiceBox<T> box = robot.lookup(selector).queryAs(ChoiceBox.class);
+        robot.clickOn(box);
+        int steps = box.getItems().indexOf(value) - box.getItems().indexOf(box.getValue());
+        for (int i = 0; i < Math.abs(steps); i++) {
+            robot.type(steps > 0 ? KeyCode.DOWN : KeyCode.UP);
+        }
+        robot.type(KeyCode.ENTER);
+        await(() -> value.equals(box.getValue()));
     }
 
     /** Lets the window come to rest. */
