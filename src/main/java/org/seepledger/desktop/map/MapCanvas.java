@@ -18,12 +18,16 @@ import org.seepledger.desktop.theme.Theme;
 import org.seepledger.job.GroundPicture;
 import org.seepledger.picture.Ink;
 import org.seepledger.picture.Mark;
+import org.seepledger.picture.ScaleBar;
 
 /** Paints the map, once per frame at most: the ground on one canvas, prisms and letters on another over it. */
 final class MapCanvas extends Region {
 
     /** How much of a picture the values over it cover. */
     private static final double OVER_PICTURE = 0.6;
+
+    private static final double CORNER = 18;
+    private static final double LONGEST_BAR = 170;
 
     private final MapModel model;
     private final GroundModel under;
@@ -165,6 +169,9 @@ final class MapCanvas extends Region {
         painter.paint(Outlines.of(model.session(), camera));
         painter.paint(Lettering.of(model));
         guests.forEach(guest -> painter.paint(guest.marks(camera)));
-        painter.paint(ScaleBar.of(model.session().set().get().orElseThrow().aquifer(), camera));
+        Aquifer aquifer = model.session().set().get().orElseThrow().aquifer();
+        double scale = camera.scale() / aquifer.grid().planUnit();
+        painter.paint(ScaleBar.within(scale, aquifer.lengthUnit().toString(), LONGEST_BAR)
+                .marks(CORNER, camera.height() - CORNER - ScaleBar.HEIGHT));
     }
 }
