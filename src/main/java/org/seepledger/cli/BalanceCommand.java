@@ -1,6 +1,5 @@
 package org.seepledger.cli;
 
-import java.nio.file.Path;
 import java.util.concurrent.Callable;
 import org.seepledger.job.BalanceJob;
 import org.seepledger.job.BalanceOutcome;
@@ -8,7 +7,6 @@ import org.seepledger.job.BalanceRequest;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
-import picocli.CommandLine.Parameters;
 
 /** {@code seepledger balance}. */
 @Command(
@@ -35,34 +33,14 @@ final class BalanceCommand implements Callable<Integer> {
 
     private final Terminal terminal;
 
-    @Parameters(paramLabel = "AQUIFER", description = "The folder with aquifer.json.")
-    private Path aquifer;
-
-    @Option(
-            names = "--prisms",
-            paramLabel = "F",
-            required = true,
-            description = "The prisms, as GeoJSON: polygons, each with a name.")
-    private Path prisms;
-
-    @Option(
-            names = "--out",
-            paramLabel = "DIR",
-            required = true,
-            description = "A new or empty folder for the results.")
-    private Path out;
+    @Mixin
+    private ResultOptions result = new ResultOptions();
 
     @Mixin
     private BudgetOptions options = new BudgetOptions();
 
     @Mixin
     private ReportOptions report = new ReportOptions();
-
-    @Option(
-            names = "--volume-unit",
-            paramLabel = "UNIT",
-            description = "Unit of volumes, such as ML (default: the set's own).")
-    private String volumeUnit;
 
     @Option(
             names = "--mass-unit",
@@ -72,9 +50,6 @@ final class BalanceCommand implements Callable<Integer> {
 
     @Mixin
     private ClosureLimit limit = new ClosureLimit();
-
-    @Option(names = "--overwrite", description = "Replace the files that an earlier run wrote to DIR.")
-    private boolean overwrite;
 
     BalanceCommand(Terminal terminal) {
         this.terminal = terminal;
@@ -87,24 +62,24 @@ final class BalanceCommand implements Callable<Integer> {
         BalanceOutcome outcome = BalanceJob.run(request(), terminal.progress(options.progress()));
         terminal.out().print(outcome.summary());
         terminal.out().println();
-        terminal.out().println("Written to " + out + ": " + String.join(", ", outcome.files()));
+        terminal.out().println("Written to " + result.out() + ": " + String.join(", ", outcome.files()));
         return limit.status(outcome.worstClosureError(), terminal.out());
     }
 
     private BalanceRequest request() {
         return new BalanceRequest(
-                aquifer,
-                prisms,
-                out,
+                result.aquifer(),
+                result.prisms(),
+                result.out(),
                 options.every(),
                 options.periods(),
                 options.waterYearStart(),
                 options.rateUnit(),
-                Choices.measure("--volume-unit", volumeUnit, "m3"),
+                result.volumeUnit(),
                 options.wells(),
                 options.clip(),
                 options.threads(),
-                overwrite,
+                result.overwrite(),
                 report.request(terminal.clock()));
     }
 }

@@ -11,7 +11,6 @@ import org.seepledger.unit.Measure;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
-import picocli.CommandLine.Parameters;
 
 /** {@code seepledger plume}. */
 @Command(
@@ -36,34 +35,14 @@ final class PlumeCommand implements Callable<Integer> {
 
     private final Terminal terminal;
 
-    @Parameters(paramLabel = "AQUIFER", description = "The folder with aquifer.json, which describes solutes.")
-    private Path aquifer;
-
-    @Option(
-            names = "--prisms",
-            paramLabel = "F",
-            required = true,
-            description = "The prisms, as GeoJSON: polygons, each with a name.")
-    private Path prisms;
-
-    @Option(
-            names = "--out",
-            paramLabel = "DIR",
-            required = true,
-            description = "A new or empty folder for the results.")
-    private Path out;
+    @Mixin
+    private ResultOptions result = new ResultOptions();
 
     @Mixin
     private BudgetOptions options = new BudgetOptions();
 
     @Option(names = "--mass-unit", paramLabel = "UNIT", description = "Unit of masses, such as g or lb (default: kg).")
     private String massUnit;
-
-    @Option(
-            names = "--volume-unit",
-            paramLabel = "UNIT",
-            description = "Unit of volumes, such as ML (default: the set's own).")
-    private String volumeUnit;
 
     @Option(
             names = "--dispersion",
@@ -91,9 +70,6 @@ final class PlumeCommand implements Callable<Integer> {
     @Mixin
     private ClosureLimit limit = new ClosureLimit();
 
-    @Option(names = "--overwrite", description = "Replace the files that an earlier run wrote to DIR.")
-    private boolean overwrite;
-
     PlumeCommand(Terminal terminal) {
         this.terminal = terminal;
     }
@@ -104,21 +80,21 @@ final class PlumeCommand implements Callable<Integer> {
         PlumeOutcome outcome = PlumeJob.run(request(), terminal.progress(options.progress()));
         terminal.out().print(outcome.summary());
         terminal.out().println();
-        terminal.out().println("Written to " + out + ": " + String.join(", ", outcome.files()));
+        terminal.out().println("Written to " + result.out() + ": " + String.join(", ", outcome.files()));
         return limit.status(outcome.worstClosureError(), terminal.out());
     }
 
     private PlumeRequest request() {
         return new PlumeRequest(
-                aquifer,
-                prisms,
-                out,
+                result.aquifer(),
+                result.prisms(),
+                result.out(),
                 options.every(),
                 options.periods(),
                 options.waterYearStart(),
                 options.rateUnit("kg/d"),
                 Choices.measure("--mass-unit", massUnit, "kg"),
-                Choices.measure("--volume-unit", volumeUnit, "m3"),
+                result.volumeUnit(),
                 options.wells(),
                 dispersion,
                 above(),
@@ -126,7 +102,7 @@ final class PlumeCommand implements Callable<Integer> {
                 Optional.ofNullable(panels),
                 options.clip(),
                 options.threads(),
-                overwrite);
+                result.overwrite());
     }
 
     private Optional<PlumeRequest.Threshold> above() {

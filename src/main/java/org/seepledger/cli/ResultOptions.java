@@ -1,0 +1,57 @@
+package org.seepledger.cli;
+
+import java.nio.file.Path;
+import java.util.Optional;
+import org.seepledger.unit.Measure;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.Parameters;
+
+/** What a command that writes a folder of results works on, where the results go, and their unit of volumes. */
+final class ResultOptions {
+
+    @Parameters(paramLabel = "AQUIFER", description = "The folder with aquifer.json.")
+    private Path aquifer;
+
+    @Option(
+            names = "--prisms",
+            paramLabel = "F",
+            required = true,
+            description = "The prisms, as GeoJSON: polygons, each with a name.")
+    private Path prisms;
+
+    @Option(
+            names = "--out",
+            paramLabel = "DIR",
+            required = true,
+            description = "A new or empty folder for the results.")
+    private Path out;
+
+    @Option(names = "--overwrite", description = "Replace the files that an earlier run wrote to DIR.")
+    private boolean overwrite;
+
+    @Option(
+            names = "--volume-unit",
+            paramLabel = "UNIT",
+            description = "Unit of volumes, such as ML (default: the set's own).")
+    private String volumeUnit;
+
+    Path aquifer() {
+        return aquifer;
+    }
+
+    Path prisms() {
+        return prisms;
+    }
+
+    Path out() {
+        return out;
+    }
+
+    boolean overwrite() {
+        return overwrite;
+    }
+
+    Optional<Measure> volumeUnit() {
+        return Choices.measure("--volume-unit", volumeUnit, "m3");
+    }
+}
