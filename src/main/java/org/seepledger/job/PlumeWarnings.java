@@ -38,6 +38,11 @@ final class PlumeWarnings {
     List<String> warnings(List<Plume> plumes) {
         List<String> warnings = new ArrayList<>();
         for (Plume plume : plumes) {
+            if (!dispersion && plume.solute().dispersion().isPresent()) {
+                warnings.add(
+                        "Dispersion is given for " + plume.solute().name()
+                                + " and left out, and is then in the residual; --dispersion books what disperses through faces.");
+            }
             addNonDetects(warnings, plume);
             addDecay(warnings, plume);
             addSpreading(warnings, plume);
@@ -138,10 +143,6 @@ final class PlumeWarnings {
         for (Solute solute : solutes) {
             if (dispersion && solute.dispersion().isEmpty()) {
                 remarks.add("No dispersion is given for " + solute.name() + ": it is advected alone.");
-            }
-            if (!dispersion && solute.dispersion().isPresent()) {
-                remarks.add("Dispersion is given for " + solute.name()
-                        + " and left out; --dispersion books what disperses through faces.");
             }
             for (int i = 0; i < aquifer.sources().size(); i++) {
                 Source source = aquifer.sources().get(i);

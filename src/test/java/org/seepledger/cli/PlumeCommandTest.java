@@ -219,6 +219,8 @@ class PlumeCommandTest {
     void booksDispersionByChoice() throws IOException {
         done();
         assertThat(rows("plume.csv")).noneMatch(row -> row.get("group").equals("dispersion"));
+        assertThat(files().plume("--overwrite").out())
+                .containsPattern("Warnings\\R(  - .*\\R)*  - Dispersion is given for salt and left out");
         files().plume("--overwrite", "--dispersion");
         assertThat(rows("plume.csv")).anyMatch(row -> row.get("group").equals("dispersion"));
         assertThat(value("net_mass", "salt", "interval 1", "dispersion", "side 2", "1"))
