@@ -1,7 +1,6 @@
 package org.seepledger.job;
 
 import java.io.IOException;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
@@ -16,10 +15,8 @@ import org.seepledger.io.raster.GeoTiffWriter;
 import org.seepledger.io.result.BudgetCsv;
 import org.seepledger.io.result.ExchangeCsv;
 import org.seepledger.io.result.FacesGeoJson;
-import org.seepledger.io.result.FileRecord;
 import org.seepledger.io.result.PrismBudget;
 import org.seepledger.io.result.ResultUnits;
-import org.seepledger.io.result.RunJson;
 import org.seepledger.io.result.Statement;
 import org.seepledger.ledger.Ledger;
 import org.seepledger.ledger.Period;
@@ -96,7 +93,8 @@ public final class BalanceJob {
             FacesGeoJson.write(out.file("faces.geojson"), subject.crs(), subject.prisms(), records, units);
             writeImbalance(balance, out);
             report.write(out, subject, balance, budgets, units, statement, optionsOfResult());
-            writeRecord(out, statement, balance);
+            RunRecord.write(
+                    out, "balance", options(), statement, subject.notes(), RunRecord.checks(balance), stopwatch);
         } catch (IOException e) {
             throw new UsageFault("The results cannot be written beside " + request.out() + " (" + Unreadable.reason(e)
                     + "). Make room or name another folder.");
@@ -120,16 +118,6 @@ public final class BalanceJob {
         }
     }
 
-    private void writeRecord(OutputFolder out, Statement statement, Balance balance) throws IOException {
-        List<FileRecord> outputs = out.records();
-        stopwatch.lap("writing");
-        Map<String, Double> checks =
-                Map.of("largest_difference_between_routes", balance.notes().disagreement());
-        RunJson.Run run = new RunJson.Run(
-                Version.text(), "balance", options(), statement, subject.notes(), checks, stopwatch.seconds());
-        RunJson.write(out.file(RunJson.NAME), run, outputs);
-    }
-
     private Map<String, String> options() {
         Map<String, String> options = optionsOfResult();
         options.putAll(report.options());
@@ -139,12 +127,8 @@ public final class BalanceJob {
 
     /** The options that results depend on. */
     private Map<String, String> optionsOfResult() {
-        Map<String, String> options = new LinkedHashMap<>();
-        options.put("aquifer", request.aquifer().toString());
-        options.put("prisms", request.prisms().toString());
-        options.put("every", request.every().name().toLowerCase(Locale.ROOT).replace('_', '-'));
-        request.periods().ifPresent(file -> options.put("periods", file.toString()));
-        options.put("water-year-start", String.valueOf(request.waterYearStart()));
+        Map<String, String> options = RunRecord.options(request.aquifer(), request.prisms());
+        RunRecord.addPeriods(options, request.every(), request.periods(), request.waterYearStart());
         request.rateUnit().ifPresent(unit -> options.put("rate-unit", unit.toString()));
         request.volumeUnit().ifPresent(unit -> options.put("volume-unit", unit.toString()));
         options.put("wells", request.wells().name().toLowerCase(Locale.ROOT));

@@ -10,7 +10,6 @@ import org.seepledger.aquifer.Grid;
 import org.seepledger.io.aquifer.AquiferCut;
 import org.seepledger.io.raster.GeoTiff;
 import org.seepledger.io.raster.RasterCut;
-import org.seepledger.io.result.FileRecord;
 import org.seepledger.io.result.RunJson;
 import org.seepledger.io.result.Statement;
 import org.seepledger.prism.PrismCut;
@@ -95,15 +94,9 @@ public final class ExtractJob {
     private void writeRecord(OutputFolder out) throws IOException {
         String title = "Extract of \"" + subject.aquifer().name() + "\"";
         Statement statement = subject.statement(title, progress);
-        List<FileRecord> outputs = out.records();
-        stopwatch.lap("writing");
-        Map<String, String> options = new LinkedHashMap<>();
-        options.put("aquifer", request.aquifer().toString());
-        options.put("prisms", request.prisms().toString());
+        Map<String, String> options = RunRecord.options(request.aquifer(), request.prisms());
         options.put("clip", String.valueOf(request.clip()));
-        RunJson.Run run = new RunJson.Run(
-                Version.text(), "extract", options, statement, subject.notes(), Map.of(), stopwatch.seconds());
-        RunJson.write(out.file(RunJson.NAME), run, outputs);
+        RunRecord.write(out, "extract", options, statement, subject.notes(), Map.of(), stopwatch);
     }
 
     private String summary(Surroundings cells, String prisms, int files) {

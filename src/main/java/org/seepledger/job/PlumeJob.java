@@ -1,7 +1,6 @@
 package org.seepledger.job;
 
 import java.io.IOException;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
@@ -17,11 +16,9 @@ import org.seepledger.fault.UsageFault;
 import org.seepledger.io.Unreadable;
 import org.seepledger.io.aquifer.AquiferReader;
 import org.seepledger.io.prisms.TransectsReader;
-import org.seepledger.io.result.FileRecord;
 import org.seepledger.io.result.MassCsv;
 import org.seepledger.io.result.MassUnits;
 import org.seepledger.io.result.PlumeCsv;
-import org.seepledger.io.result.RunJson;
 import org.seepledger.io.result.Statement;
 import org.seepledger.io.result.TransectCsv;
 import org.seepledger.io.result.TrendCsv;
@@ -180,30 +177,16 @@ public final class PlumeJob {
                 TransectCsv.write(
                         out.file("transect.csv"), statement, crossings, measured, periods, times, units, length);
             }
-            writeRecord(out, statement, water);
+            RunRecord.write(out, "plume", options(), statement, subject.notes(), RunRecord.checks(water), stopwatch);
         } catch (IOException e) {
             throw new UsageFault("The results cannot be written beside " + request.out() + " (" + Unreadable.reason(e)
                     + "). Make room or name another folder.");
         }
     }
 
-    private void writeRecord(OutputFolder out, Statement statement, Balance water) throws IOException {
-        List<FileRecord> outputs = out.records();
-        stopwatch.lap("writing");
-        Map<String, Double> checks =
-                Map.of("largest_difference_between_routes", water.notes().disagreement());
-        RunJson.Run run = new RunJson.Run(
-                Version.text(), "plume", options(), statement, subject.notes(), checks, stopwatch.seconds());
-        RunJson.write(out.file(RunJson.NAME), run, outputs);
-    }
-
     private Map<String, String> options() {
-        Map<String, String> options = new LinkedHashMap<>();
-        options.put("aquifer", request.aquifer().toString());
-        options.put("prisms", request.prisms().toString());
-        options.put("every", request.every().name().toLowerCase(Locale.ROOT).replace('_', '-'));
-        request.periods().ifPresent(file -> options.put("periods", file.toString()));
-        options.put("water-year-start", String.valueOf(request.waterYearStart()));
+        Map<String, String> options = RunRecord.options(request.aquifer(), request.prisms());
+        RunRecord.addPeriods(options, request.every(), request.periods(), request.waterYearStart());
         options.put("rate-unit", units.rate().toString());
         options.put("mass-unit", units.mass().toString());
         options.put("volume-unit", units.volume().toString());
