@@ -21,6 +21,7 @@ import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.port.Questions;
 import org.seepledger.desktop.port.RecentFolders;
+import org.seepledger.desktop.port.Settings;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Opening;
 import org.seepledger.desktop.session.Session;
@@ -50,7 +51,13 @@ final class Assembly {
     private final Scene scene;
 
     /** What the window asks of the machine. */
-    record Outside(Tasks tasks, FileDialogs dialogs, Questions questions, CopyBoard copies, RecentFolders folders) {}
+    record Outside(
+            Tasks tasks,
+            FileDialogs dialogs,
+            Questions questions,
+            CopyBoard copies,
+            RecentFolders folders,
+            Settings settings) {}
 
     Assembly(Outside outside, List<Path> samplePlaces) {
         this.outside = outside;
@@ -78,7 +85,7 @@ final class Assembly {
                 mapView,
                 Optional.of(folio.pages()),
                 Optional.of(folio.ribbon()));
-        this.view = new ShellView(shell, slots, actions);
+        this.view = new ShellView(shell, slots, actions, outside.settings());
         actions.add(actionsOfWindow());
         actions.add(mapView.actions());
         actions.add(new DraftActions(draft, hand, files, tray, mapView::repaint).all(map));
@@ -97,6 +104,8 @@ final class Assembly {
                 new Action(window, "action.welcome", "Shortcut+Home", shell::turnPage),
                 new Action(window, "action.theme", "F9", shell::switchTheme),
                 new Action(window, "action.pane", "F6", view::nextPane),
+                new Action(window, "action.fold.side", "Shift+F6", view::turnSide),
+                new Action(window, "action.fold.below", "Shortcut+F6", view::turnBelow),
                 new Action(window, "action.caution", "Shift+F1", view::showCaution),
                 new Action(time, "action.later", "Period", () -> shell.move(1)),
                 new Action(time, "action.earlier", "Comma", () -> shell.move(-1)),
