@@ -31,6 +31,7 @@ public final class Folio {
     private final BorderPane pages = new BorderPane();
     private final ToggleGroup chosen = new ToggleGroup();
     private final HBox marks = new HBox();
+    private final LiveBudget live;
     private final LedgerModel ledger;
     private final Node ribbon;
 
@@ -44,7 +45,7 @@ public final class Folio {
      */
     public Folio(Session session, Tasks tasks, CopyBoard copies, ObservableValue<Theme> theme) {
         Reading reading = new Reading(session);
-        LiveBudget live = new LiveBudget(session, tasks);
+        this.live = new LiveBudget(session, tasks);
         new FaceFeed(session, live, reading).begin();
         this.ledger = new LedgerModel(session, live, reading, copies);
         pages.setId("folio");
@@ -87,6 +88,11 @@ public final class Folio {
     /** {@return the ribbon of time} */
     public Node ribbon() {
         return ribbon;
+    }
+
+    /** Works out again what was stopped or failed. */
+    public void again() {
+        live.again();
     }
 
     /** {@return what can be done here} */

@@ -147,7 +147,7 @@ public final class LedgerModel {
         if (!rows.isEmpty() && !belongs.get().isEmpty()) {
             LedgerCopy copy = new LedgerCopy(belongs.get(), unit.get(), rows);
             copies.table(copy.tabSeparated(), copy.html());
-            session.status().set(Words.of("ledger.copied", belongs.get()));
+            session.notices().done(Words.of("ledger.copied", belongs.get()));
         }
     }
 

@@ -9,6 +9,7 @@ import javafx.beans.property.SimpleIntegerProperty;
 import javafx.beans.property.SimpleObjectProperty;
 import javafx.beans.property.SimpleStringProperty;
 import javafx.beans.property.StringProperty;
+import org.seepledger.desktop.notice.Notices;
 import org.seepledger.prism.Prism;
 import org.seepledger.report.CellPlace;
 
@@ -22,6 +23,7 @@ public final class Session {
     private final StringProperty selected = new SimpleStringProperty("");
     private final StringProperty lit = new SimpleStringProperty("");
     private final StringProperty status = new SimpleStringProperty("");
+    private final Notices notices = new Notices();
     private final ObjectProperty<FaceFlows> faceFlows = new SimpleObjectProperty<>(FaceFlows.NONE);
     private final ObjectProperty<Optional<CellPlace>> target = new SimpleObjectProperty<>(Optional.empty());
     private final ObjectProperty<Demand> demand = new SimpleObjectProperty<>(Demand.NONE);
@@ -86,7 +88,12 @@ public final class Session {
         return lit;
     }
 
-    /** {@return what the status line says} */
+    /** {@return what has been done, what to know, what was refused} */
+    public Notices notices() {
+        return notices;
+    }
+
+    /** {@return what the status line says can be done now} */
     public StringProperty status() {
         return status;
     }
