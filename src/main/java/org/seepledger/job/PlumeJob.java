@@ -129,9 +129,7 @@ public final class PlumeJob {
     }
 
     private List<Solute> solutes() {
-        List<Solute> solutes = subject.folder().solutes().stream()
-                .filter(solute -> solute.concentration().isPresent())
-                .toList();
+        List<Solute> solutes = SoluteBench.known(subject.folder().solutes());
         if (solutes.isEmpty()) {
             throw new DataFault(
                     AquiferReader.FILE,
