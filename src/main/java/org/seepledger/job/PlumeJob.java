@@ -55,9 +55,8 @@ public final class PlumeJob {
         this.units = units();
         this.periods = subject.periods(request.every(), request.periods(), request.waterYearStart());
         this.above = request.above()
-                .map(threshold -> OptionalDouble.of(threshold.value()
-                        / MassUnits.concentrationFactor(
-                                threshold.unit(), subject.aquifer().lengthUnit())))
+                .map(threshold ->
+                        OptionalDouble.of(threshold.kilograms(subject.aquifer().lengthUnit())))
                 .orElse(OptionalDouble.empty());
     }
 

@@ -29,14 +29,14 @@ public final class Requests {
                 ReportRequest.dated(LocalDate.of(2024, 5, 31)));
     }
 
-    /** The solute budget of prisms and transects by interval, cut at the grid's edge. */
-    public static PlumeRequest plumeByInterval(
-            Path set, Path prisms, Path out, boolean dispersion, Optional<Path> transects) {
+    /** The solute budget of prisms and transects, cut at the grid's edge. */
+    public static PlumeRequest plume(
+            Path set, Path prisms, Path out, Periods.Every every, boolean dispersion, Optional<Path> transects) {
         return new PlumeRequest(
                 set,
                 prisms,
                 out,
-                Periods.Every.INTERVAL,
+                every,
                 Optional.empty(),
                 10,
                 Optional.empty(),

@@ -78,7 +78,9 @@ class SoluteBenchTest {
     private void assertCommandsNumbers(Path set, Path transects, boolean dispersion) throws IOException {
         Path prisms = set.resolve("prisms.geojson");
         Path out = folder.resolve("out " + dispersion);
-        PlumeJob.run(Requests.plumeByInterval(set, prisms, out, dispersion, Optional.of(transects)), Progress.NONE);
+        PlumeJob.run(
+                Requests.plume(set, prisms, out, Periods.Every.INTERVAL, dispersion, Optional.of(transects)),
+                Progress.NONE);
         try (Workbench bench = Workbench.open(set)) {
             List<String> expected = Rows.text(out.resolve("plume.csv"));
             SoluteBench.Choice choice = new SoluteBench.Choice(dispersion, OptionalDouble.empty());

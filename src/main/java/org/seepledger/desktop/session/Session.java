@@ -21,6 +21,7 @@ public final class Session {
     private final IntegerProperty layer = new SimpleIntegerProperty();
     private final StringProperty selected = new SimpleStringProperty("");
     private final StringProperty lit = new SimpleStringProperty("");
+    private final StringProperty solute = new SimpleStringProperty("");
     private final StringProperty status = new SimpleStringProperty("");
     private final ObjectProperty<FaceFlows> faceFlows = new SimpleObjectProperty<>(FaceFlows.NONE);
     private final ObjectProperty<Optional<CellPlace>> target = new SimpleObjectProperty<>(Optional.empty());
@@ -44,6 +45,7 @@ public final class Session {
     public void show(Optional<OpenSet> opened) {
         lit.set("");
         faceFlows.set(FaceFlows.NONE);
+        solute.set("");
         selected.set("");
         interval.set(0);
         layer.set(0);
@@ -84,6 +86,11 @@ public final class Session {
     /** {@return the item of the selected prism's face that is lit up, as {@code side 3}; empty for none} */
     public StringProperty lit() {
         return lit;
+    }
+
+    /** {@return the name of the solute whose budget is looked at; empty for water's} */
+    public StringProperty solute() {
+        return solute;
     }
 
     /** {@return what the status line says} */
