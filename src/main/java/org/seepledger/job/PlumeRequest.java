@@ -4,6 +4,7 @@ import java.nio.file.Path;
 import java.util.Optional;
 import org.seepledger.balance.Periods;
 import org.seepledger.balance.WellRule;
+import org.seepledger.io.result.MassUnits;
 import org.seepledger.unit.Measure;
 
 /**
@@ -54,5 +55,15 @@ public record PlumeRequest(
      * @param value the number
      * @param unit its unit
      */
-    public record Threshold(double value, Measure unit) {}
+    public record Threshold(double value, Measure unit) {
+
+        /**
+         * {@return the concentration in kg/length³}
+         *
+         * @param length the set's length unit
+         */
+        public double kilograms(Measure length) {
+            return value / MassUnits.concentrationFactor(unit, length);
+        }
+    }
 }
