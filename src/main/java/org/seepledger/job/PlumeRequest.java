@@ -46,6 +46,28 @@ public record PlumeRequest(
         int threads,
         boolean overwrite) {
 
+    /** The same request with its results in another folder. */
+    PlumeRequest into(Path folder) {
+        return new PlumeRequest(
+                aquifer,
+                prisms,
+                folder,
+                every,
+                periods,
+                waterYearStart,
+                rateUnit,
+                massUnit,
+                volumeUnit,
+                wells,
+                dispersion,
+                above,
+                transects,
+                panels,
+                clip,
+                threads,
+                overwrite);
+    }
+
     /**
      * A concentration with its unit.
      *

@@ -74,8 +74,8 @@ final class ReportFile {
         return options;
     }
 
-    /** Writes the report. */
-    void write(
+    /** Writes the report; gives its pictures of each prism. */
+    List<PrismPictures> write(
             OutputFolder out,
             Subject subject,
             Balance balance,
@@ -108,6 +108,7 @@ final class ReportFile {
                 drawing.exchange(results.get(0).record().period()));
         Path file = out.file(NAME);
         Files.writeString(file, ReportPage.of(report));
+        return pictures;
     }
 
     private Masthead masthead(Subject subject) {
