@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.function.Consumer;
 import org.seepledger.aquifer.Aquifer;
+import org.seepledger.aquifer.GriddedValues;
 import org.seepledger.aquifer.KeptCells;
 import org.seepledger.aquifer.Window;
 import org.seepledger.balance.Balance;
@@ -30,6 +31,7 @@ import org.seepledger.prism.Prism;
 import org.seepledger.progress.Cancelled;
 import org.seepledger.progress.Progress;
 import org.seepledger.sketch.Drawing;
+import org.seepledger.sketch.Limit;
 import org.seepledger.unit.Measure;
 
 /**
@@ -160,6 +162,23 @@ public final class Workbench implements AutoCloseable {
             Drawing drawing = new DrawingReader(crs(), aquifer().layers().size(), notes::add).read(file, shown);
             synchronized (surfaces) {
                 return DrawingFile.of(drawing, DataFolder.holding(file, shown), surfaces, notes);
+            }
+        });
+    }
+
+    /**
+     * {@return the elevations of a surface raster, which prisms may then name as their top or bottom; it stays open as long as
+     * the workbench}
+     *
+     * @param file the file that the prisms are kept in, from whose folder the surface is named
+     * @param surface the surface
+     * @throws org.seepledger.fault.DataFault if it is not there, leads out of the folder, or does not match the grid
+     */
+    public GriddedValues surface(Path file, Limit.Surface surface) {
+        return gate.ask(Progress.NONE, progress -> {
+            DataFolder folder = DataFolder.holding(file, file.toString());
+            synchronized (surfaces) {
+                return surfaces.read(folder.resolve(surface.path(), "a top or bottom"), surface.path());
             }
         });
     }

@@ -66,7 +66,7 @@ final class MapCanvas extends Region {
             session.selected(),
             session.lit(),
             session.faceFlows(),
-            model.wells(),
+            session.wells(),
             model.overlays().wells()
         };
         for (Observable cause : causes) {
