@@ -85,7 +85,7 @@ public final class HandoverModel {
         this.copies = copies;
         this.opener = opener;
         this.painter = painter;
-        this.working = tasks.latest("handing over");
+        this.working = tasks.latest("task.handing");
         this.looking = tasks.latest("looking at the folder to hand over");
         this.choices = new HandoverChoices(session.pictures());
         session.set().addListener((set, before, after) -> begin());
