@@ -2,11 +2,9 @@ package org.seepledger.plume;
 
 import java.util.ArrayList;
 import java.util.HashMap;
-import java.util.IdentityHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.stream.Stream;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.Block;
 import org.seepledger.aquifer.CellGeometry;
@@ -14,9 +12,6 @@ import org.seepledger.aquifer.GriddedValues;
 import org.seepledger.aquifer.IntervalState;
 import org.seepledger.aquifer.PlacedWell;
 import org.seepledger.aquifer.Solute;
-import org.seepledger.aquifer.Source;
-import org.seepledger.aquifer.Well;
-import org.seepledger.aquifer.WellRate;
 import org.seepledger.aquifer.Window;
 import org.seepledger.balance.PrismWalk;
 import org.seepledger.progress.Progress;
@@ -31,8 +26,7 @@ final class PlumeBand {
     private final List<List<SoluteChart>> charts;
     private final List<PlacedWell> wells;
     private final SoluteBalance.Options options;
-    private final List<Integer> terms = new ArrayList<>();
-    private final Map<Well, Integer> sourceOfWell = new IdentityHashMap<>();
+    private final Givers givers;
 
     PlumeBand(
             Aquifer aquifer,
@@ -51,15 +45,7 @@ final class PlumeBand {
                 .filter(well -> window.contains(well.row(), well.column()))
                 .toList();
         this.options = options;
-        for (int i = 0; i < aquifer.sources().size(); i++) {
-            if (aquifer.sources().get(i) instanceof Source.Points points) {
-                for (Well well : points.wells()) {
-                    sourceOfWell.put(well, i);
-                }
-            } else {
-                terms.add(i);
-            }
-        }
+        this.givers = new Givers(aquifer);
     }
 
     PlumeSums work(Progress progress) {
@@ -125,17 +111,13 @@ final class PlumeBand {
     private List<Optional<double[]>> carried(Solute solute, int interval, IntervalState state) {
         Map<Integer, double[]> bySource = new HashMap<>();
         List<Optional<double[]>> carried = new ArrayList<>();
-        Stream<Integer> givers = Stream.concat(
-                terms.stream(), state.terms().stream().skip(terms.size()).map(term -> -1));
-        Stream<Integer> wellGivers =
-                state.wells().stream().map(WellRate::well).map(well -> sourceOfWell.get(well.well()));
-        Stream.concat(givers, wellGivers).forEach(source -> {
+        for (int source : givers.of(state)) {
             GriddedValues given = solute.ofSources().get(source);
             carried.add(
                     given == null
                             ? Optional.empty()
                             : Optional.of(bySource.computeIfAbsent(source, key -> read(given, interval, state))));
-        });
+        }
         return carried;
     }
 
