@@ -58,9 +58,8 @@ public final class PlumeJob {
         this.units = units();
         this.periods = subject.periods(request.every(), request.periods(), request.waterYearStart());
         this.above = request.above()
-                .map(threshold -> OptionalDouble.of(threshold.value()
-                        / MassUnits.concentrationFactor(
-                                threshold.unit(), subject.aquifer().lengthUnit())))
+                .map(threshold ->
+                        OptionalDouble.of(threshold.kilograms(subject.aquifer().lengthUnit())))
                 .orElse(OptionalDouble.empty());
         this.report = new ReportFile(request.report(), periods);
     }
@@ -136,9 +135,7 @@ public final class PlumeJob {
     }
 
     private List<Solute> solutes() {
-        List<Solute> solutes = subject.folder().solutes().stream()
-                .filter(solute -> solute.concentration().isPresent())
-                .toList();
+        List<Solute> solutes = SoluteBench.known(subject.folder().solutes());
         if (solutes.isEmpty()) {
             throw new DataFault(
                     AquiferReader.FILE,

@@ -4,6 +4,7 @@ import java.nio.file.Path;
 import java.util.Optional;
 import org.seepledger.balance.Periods;
 import org.seepledger.balance.WellRule;
+import org.seepledger.io.result.MassUnits;
 import org.seepledger.unit.Measure;
 
 /**
@@ -48,11 +49,44 @@ public record PlumeRequest(
         boolean overwrite,
         ReportRequest report) {
 
+    /** The same request with its results in another folder. */
+    PlumeRequest into(Path folder) {
+        return new PlumeRequest(
+                aquifer,
+                prisms,
+                folder,
+                every,
+                periods,
+                waterYearStart,
+                rateUnit,
+                massUnit,
+                volumeUnit,
+                wells,
+                dispersion,
+                above,
+                transects,
+                panels,
+                clip,
+                threads,
+                overwrite,
+                report);
+    }
+
     /**
      * A concentration with its unit.
      *
      * @param value the number
      * @param unit its unit
      */
-    public record Threshold(double value, Measure unit) {}
+    public record Threshold(double value, Measure unit) {
+
+        /**
+         * {@return the concentration in kg/length³}
+         *
+         * @param length the set's length unit
+         */
+        public double kilograms(Measure length) {
+            return value / MassUnits.concentrationFactor(unit, length);
+        }
+    }
 }

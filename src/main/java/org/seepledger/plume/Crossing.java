@@ -1,16 +1,18 @@
 package org.seepledger.plume;
 
+import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import java.util.stream.IntStream;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.Solute;
+import org.seepledger.balance.Span;
 import org.seepledger.ledger.Period;
 import org.seepledger.prism.Pieces;
 import org.seepledger.prism.Transect;
 
 /**
- * What crosses a transect of one solute: water and mass by interval, piece and layer.
+ * What crosses a transect of one solute: water and mass by interval, piece and layer; NaN in intervals not asked for.
  *
  * @param transect the transect
  * @param solute the solute
@@ -29,16 +31,25 @@ public record Crossing(
         double[][] flows,
         double[][][] rates) {
 
-    static Crossing empty(Transect transect, Solute solute, Pieces pieces, int layers, int intervals) {
+    static Crossing empty(Transect transect, Solute solute, Pieces pieces, int layers, int intervals, Span span) {
         int panels = pieces.count() * layers;
-        return new Crossing(
+        double[] none = new double[panels];
+        Arrays.fill(none, Double.NaN);
+        Crossing crossing = new Crossing(
                 transect,
                 solute,
                 pieces,
                 layers,
-                new double[intervals][panels],
-                new double[intervals][panels],
-                new double[intervals][NonDetects.values().length][panels]);
+                new double[intervals][],
+                new double[intervals][],
+                new double[intervals][NonDetects.values().length][]);
+        for (int interval = 0; interval < intervals; interval++) {
+            boolean asked = interval >= span.from() && interval < span.to();
+            crossing.areas[interval] = asked ? new double[panels] : none;
+            crossing.flows[interval] = asked ? new double[panels] : none;
+            Arrays.setAll(crossing.rates[interval], choice -> asked ? new double[panels] : none);
+        }
+        return crossing;
     }
 
     /**
