@@ -129,6 +129,7 @@ final class PlumeBand {
                 ? known.matrix().solute().dispersion().map(given -> new DispersiveFaces(state, known.matrix(), given))
                 : Optional.empty();
         double length = scope.aquifer().times().length(interval);
+        IntervalState field = CarriedField.of(state, known);
         for (int prism = 0; prism < walks.size(); prism++) {
             SoluteTally tally = sums.tally(interval, prism, solute);
             SoluteChart chart = charts.get(prism).get(solute);
@@ -139,6 +140,7 @@ final class PlumeBand {
             SoluteBookings bookings = new SoluteBookings(chart, state, known, tally, length, counting);
             overBand.get(prism).book(state, bookings);
             bookings.finish();
+            overBand.get(prism).book(field, new AlongCells(field, tally.alongCells()));
         }
         spreading.ifPresent(faces -> bookSpreading(faces, interval, state, overBand, solute, known, sums));
     }
