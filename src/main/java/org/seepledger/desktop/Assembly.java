@@ -3,7 +3,9 @@ package org.seepledger.desktop;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
+import javafx.scene.Node;
 import javafx.scene.Scene;
+import javafx.scene.layout.StackPane;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.desktop.action.Action;
 import org.seepledger.desktop.action.Actions;
@@ -13,6 +15,8 @@ import org.seepledger.desktop.draw.DraftHand;
 import org.seepledger.desktop.draw.DraftModel;
 import org.seepledger.desktop.draw.Tray;
 import org.seepledger.desktop.folio.Folio;
+import org.seepledger.desktop.intake.IntakeModel;
+import org.seepledger.desktop.intake.IntakeView;
 import org.seepledger.desktop.map.GroundModel;
 import org.seepledger.desktop.map.MapModel;
 import org.seepledger.desktop.map.MapView;
@@ -40,6 +44,7 @@ final class Assembly {
     private final Session session = new Session();
     private final ShellModel shell = new ShellModel(session);
     private final WelcomeModel welcome;
+    private final IntakeModel intake;
     private final MapModel map;
     private final DraftModel draft;
     private final DraftHand hand;
@@ -57,6 +62,8 @@ final class Assembly {
         this.map = new MapModel(session, outside.tasks());
         this.welcome = new WelcomeModel(
                 outside.tasks(), outside.dialogs(), outside.folders(), this::show, go -> files().whenSafe(go));
+        this.intake = new IntakeModel(outside.tasks(), outside.dialogs(), welcome::open);
+        welcome.whenLoose(this::bring);
         Actions actions = new Actions();
         this.draft = new DraftModel(session);
         this.hand = new DraftHand(draft);
@@ -73,11 +80,7 @@ final class Assembly {
         draft.tool().addListener((tool, before, after) -> mapView.repaint());
         Folio folio = new Folio(session, outside.tasks(), outside.copies(), shell.theme());
         Slots slots = new Slots(
-                new WelcomeView(welcome),
-                new ShowingBar(map),
-                mapView,
-                Optional.of(folio.pages()),
-                Optional.of(folio.ribbon()));
+                firstPages(), new ShowingBar(map), mapView, Optional.of(folio.pages()), Optional.of(folio.ribbon()));
         this.view = new ShellView(shell, slots, actions);
         actions.add(actionsOfWindow());
         actions.add(mapView.actions());
@@ -94,6 +97,7 @@ final class Assembly {
         return List.of(
                 new Action(window, "action.list", "F1", view::showActions),
                 new Action(window, "action.open", "Shortcut+O", welcome::choose),
+                new Action(window, "action.intake", "Shortcut+Shift+O", this::turnToIntake),
                 new Action(window, "action.welcome", "Shortcut+Home", shell::turnPage),
                 new Action(window, "action.theme", "F9", shell::switchTheme),
                 new Action(window, "action.pane", "F6", view::nextPane),
@@ -102,6 +106,32 @@ final class Assembly {
                 new Action(time, "action.earlier", "Comma", () -> shell.move(-1)),
                 new Action(time, "action.deeper", "Page Down", () -> shell.sink(1)),
                 new Action(time, "action.higher", "Page Up", () -> shell.sink(-1)));
+    }
+
+    /** One behind the other; what is behind is hidden from the keyboard too. */
+    private Node firstPages() {
+        WelcomeView first = new WelcomeView(welcome);
+        first.visibleProperty().bind(intake.shown().not());
+        return new StackPane(first, new IntakeView(intake, this::leaveIntake));
+    }
+
+    private void turnToIntake() {
+        if (intake.shown().get() && shell.atWelcome().get()) {
+            leaveIntake();
+        } else {
+            bring(List.of());
+        }
+    }
+
+    /** Shows the import assistant, with more files. */
+    private void bring(List<Path> paths) {
+        shell.atWelcome().set(true);
+        intake.bring(paths);
+    }
+
+    private void leaveIntake() {
+        intake.shown().set(false);
+        shell.atWelcome().set(session.set().get().isEmpty());
     }
 
     private void show(Opening opening) {
@@ -165,5 +195,9 @@ final class Assembly {
 
     WelcomeModel welcome() {
         return welcome;
+    }
+
+    IntakeModel intake() {
+        return intake;
     }
 }

@@ -12,11 +12,13 @@ import javafx.collections.ObservableList;
 import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.port.RecentFolders;
 import org.seepledger.desktop.session.Opening;
+import org.seepledger.desktop.task.EntryGuard;
 import org.seepledger.desktop.task.Lane;
 import org.seepledger.desktop.task.PaneState;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.words.FaultWords;
 import org.seepledger.desktop.words.Words;
+import org.seepledger.io.aquifer.AquiferReader;
 
 /** What can be opened, and the opening of it. */
 public final class WelcomeModel {
@@ -29,6 +31,8 @@ public final class WelcomeModel {
     private final Lane looking;
     private final ObservableList<Place> samples = FXCollections.observableArrayList();
     private final ObservableList<Place> recent = FXCollections.observableArrayList();
+    private final ReadOnlyObjectWrapper<Optional<Path>> failed = new ReadOnlyObjectWrapper<>(Optional.empty());
+    private Consumer<List<Path>> loose = paths -> {};
     private final ReadOnlyObjectWrapper<PaneState> state = new ReadOnlyObjectWrapper<>(PaneState.READY);
 
     /**
@@ -106,6 +110,7 @@ public final class WelcomeModel {
     }
 
     private void read(Path folder) {
+        failed.set(Optional.empty());
         state.set(PaneState.working(Words.of("open.working", folder.getFileName())));
         opening.run(
                 progress -> Opening.of(folder),
@@ -114,16 +119,54 @@ public final class WelcomeModel {
                     folders.remember(result.set().path());
                     opened.accept(result);
                 },
-                fault -> state.set(PaneState.failed(FaultWords.of(fault))));
+                fault -> {
+                    failed.set(Optional.of(folder));
+                    state.set(PaneState.failed(FaultWords.of(fault)));
+                });
     }
 
     /**
-     * Opens the first folder of several that were dropped.
+     * Takes files and folders that make no aquifer folder.
+     *
+     * @param taker gets them
+     */
+    public void whenLoose(Consumer<List<Path>> taker) {
+        loose = taker;
+    }
+
+    /** Goes to where loose files are made into an aquifer folder. */
+    void bringLoose() {
+        loose.accept(List.of());
+    }
+
+    /** Brings the files of the folder that could not be opened. */
+    void bringFailed() {
+        failed.get().ifPresent(folder -> loose.accept(List.of(folder)));
+    }
+
+    /** {@return the folder that could not be opened and has no description, if it is so} */
+    ReadOnlyObjectProperty<Optional<Path>> failed() {
+        return failed.getReadOnlyProperty();
+    }
+
+    /**
+     * Opens the first aquifer folder of several files and folders that were dropped; if there is none, they are loose files.
      *
      * @param dropped the files and folders
      */
     public void drop(List<Path> dropped) {
-        Optional<Path> first = dropped.stream().findFirst();
-        first.ifPresent(this::open);
+        opening.run(
+                progress -> dropped.stream().filter(WelcomeModel::isAquifer).findFirst(),
+                first -> first.ifPresentOrElse(this::open, () -> {
+                    if (!dropped.isEmpty()) {
+                        loose.accept(dropped);
+                    }
+                }),
+                fault -> state.set(PaneState.failed(FaultWords.of(fault))));
+    }
+
+    private static boolean isAquifer(Path path) {
+        EntryGuard.enter();
+        return path.endsWith(AquiferReader.FILE) || Files.isRegularFile(path.resolve(AquiferReader.FILE));
     }
 }
