@@ -3,6 +3,8 @@ package org.seepledger.desktop;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
+import javafx.beans.binding.Bindings;
+import javafx.beans.binding.BooleanBinding;
 import javafx.scene.Node;
 import javafx.scene.Scene;
 import javafx.scene.layout.StackPane;
@@ -15,16 +17,23 @@ import org.seepledger.desktop.draw.DraftHand;
 import org.seepledger.desktop.draw.DraftModel;
 import org.seepledger.desktop.draw.Tray;
 import org.seepledger.desktop.folio.Folio;
+import org.seepledger.desktop.handover.HandoverModel;
+import org.seepledger.desktop.handover.HandoverPage;
 import org.seepledger.desktop.intake.IntakeModel;
 import org.seepledger.desktop.intake.IntakeView;
+import org.seepledger.desktop.intake.MendModel;
+import org.seepledger.desktop.intake.MendView;
 import org.seepledger.desktop.map.GroundModel;
 import org.seepledger.desktop.map.MapModel;
 import org.seepledger.desktop.map.MapView;
 import org.seepledger.desktop.map.ShowingBar;
+import org.seepledger.desktop.paint.PicturePng;
 import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.port.FileDialogs;
+import org.seepledger.desktop.port.Opener;
 import org.seepledger.desktop.port.Questions;
 import org.seepledger.desktop.port.RecentFolders;
+import org.seepledger.desktop.running.RunningModel;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Opening;
 import org.seepledger.desktop.session.Session;
@@ -45,17 +54,26 @@ final class Assembly {
     private final ShellModel shell = new ShellModel(session);
     private final WelcomeModel welcome;
     private final IntakeModel intake;
+    private final MendModel mend;
     private final MapModel map;
     private final DraftModel draft;
     private final DraftHand hand;
     private final DraftFiles files;
     private final Tray tray;
+    private final Folio folio;
+    private final RunningModel running;
     private final MapView mapView;
     private final ShellView view;
     private final Scene scene;
 
     /** What the window asks of the machine. */
-    record Outside(Tasks tasks, FileDialogs dialogs, Questions questions, CopyBoard copies, RecentFolders folders) {}
+    record Outside(
+            Tasks tasks,
+            FileDialogs dialogs,
+            Questions questions,
+            CopyBoard copies,
+            RecentFolders folders,
+            Opener opener) {}
 
     Assembly(Outside outside, List<Path> samplePlaces) {
         this.outside = outside;
@@ -63,7 +81,9 @@ final class Assembly {
         this.welcome = new WelcomeModel(
                 outside.tasks(), outside.dialogs(), outside.folders(), this::show, go -> files().whenSafe(go));
         this.intake = new IntakeModel(outside.tasks(), outside.dialogs(), welcome::open);
+        this.mend = new MendModel(outside.tasks(), welcome::open);
         welcome.whenLoose(this::bring);
+        welcome.whenWrong(mend::mend);
         Actions actions = new Actions();
         this.draft = new DraftModel(session);
         this.hand = new DraftHand(draft);
@@ -78,14 +98,22 @@ final class Assembly {
                 tray);
         draft.version().addListener((version, before, after) -> mapView.repaint());
         draft.tool().addListener((tool, before, after) -> mapView.repaint());
-        Folio folio = new Folio(session, outside.tasks(), outside.copies(), shell.theme());
+        this.running = new RunningModel(outside.tasks()::running);
+        this.folio = new Folio(session, outside.tasks(), outside.copies(), shell.theme());
         Slots slots = new Slots(
                 firstPages(), new ShowingBar(map), mapView, Optional.of(folio.pages()), Optional.of(folio.ribbon()));
-        this.view = new ShellView(shell, slots, actions);
+        this.view = new ShellView(shell, slots, actions, running);
         actions.add(actionsOfWindow());
         actions.add(mapView.actions());
         actions.add(new DraftActions(draft, hand, files, tray, mapView::repaint).all(map));
         actions.add(folio.actions());
+        HandoverModel handover = new HandoverModel(
+                session, outside.tasks(), outside.dialogs(), outside.copies(), outside.opener(), new PicturePng());
+        HandoverPage handoverPage = new HandoverPage(handover, view::lift);
+        actions.add(List.of(new Action("actions.group.file", "action.handover", "Shortcut+E", () -> {
+            view.lower(handoverPage);
+            handoverPage.open();
+        })));
         this.scene = new Scene(view, 1280, 800);
         Dress.put(scene, shell.theme());
         welcome.look(samplePlaces);
@@ -102,6 +130,10 @@ final class Assembly {
                 new Action(window, "action.theme", "F9", shell::switchTheme),
                 new Action(window, "action.pane", "F6", view::nextPane),
                 new Action(window, "action.caution", "Shift+F1", view::showCaution),
+                new Action(window, "action.notices", "F7", view::showNotices),
+                new Action(window, "action.running", "F10", view::showRunning),
+                new Action(window, "action.stop", "Shift+Esc", running::canStop, running::stop),
+                new Action(window, "action.again", "Shortcut+R", this::again),
                 new Action(time, "action.later", "Period", () -> shell.move(1)),
                 new Action(time, "action.earlier", "Comma", () -> shell.move(-1)),
                 new Action(time, "action.deeper", "Page Down", () -> shell.sink(1)),
@@ -111,8 +143,14 @@ final class Assembly {
     /** One behind the other; what is behind is hidden from the keyboard too. */
     private Node firstPages() {
         WelcomeView first = new WelcomeView(welcome);
-        first.visibleProperty().bind(intake.shown().not());
-        return new StackPane(first, new IntakeView(intake, this::leaveIntake));
+        IntakeView loose = new IntakeView(intake, this::leaveIntake);
+        MendView wrong = new MendView(mend);
+        BooleanBinding mending =
+                Bindings.createBooleanBinding(() -> mend.folder().get().isPresent(), mend.folder());
+        first.visibleProperty().bind(intake.shown().or(mending).not());
+        loose.visibleProperty().bind(intake.shown().and(mending.not()));
+        wrong.visibleProperty().bind(mending);
+        return new StackPane(first, loose, wrong);
     }
 
     private void turnToIntake() {
@@ -134,10 +172,16 @@ final class Assembly {
         shell.atWelcome().set(session.set().get().isEmpty());
     }
 
+    private void again() {
+        folio.again();
+        map.values().again();
+    }
+
     private void show(Opening opening) {
         Optional<OpenSet> before = session.set().get();
         session.show(Optional.of(opening.set()));
-        session.status().set(opened(opening.set().aquifer()));
+        opening.set().workbench().warnings().forEach(session.notices()::warn);
+        session.notices().done(opened(opening.set().aquifer()));
         files.begin(opening);
         mapView.focus();
         before.ifPresent(this::putAway);
@@ -145,7 +189,7 @@ final class Assembly {
 
     private void putAway(OpenSet set) {
         outside.tasks()
-                .each("closing", 1)
+                .each("task.closing", 1)
                 .run(
                         progress -> {
                             set.close();
@@ -195,6 +239,10 @@ final class Assembly {
 
     WelcomeModel welcome() {
         return welcome;
+    }
+
+    MendModel mend() {
+        return mend;
     }
 
     IntakeModel intake() {

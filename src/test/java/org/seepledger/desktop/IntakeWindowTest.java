@@ -12,6 +12,7 @@ import javafx.scene.control.Button;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.ListView;
+import javafx.scene.control.TextArea;
 import javafx.scene.control.TextField;
 import javafx.scene.input.KeyCode;
 import org.junit.jupiter.api.AfterEach;
@@ -157,5 +158,42 @@ class IntakeWindowTest {
         window.robot.clickOn("#mend-folder");
         window.await(() -> window.assembly().intake().plan().get().isPresent());
         assertThat(isShown("#intake")).isTrue();
+    }
+
+    @Test
+    void aFolderWithAWrongDescriptionIsMendedAndOpened() throws IOException {
+        Path set = folder.resolve("valley");
+        Files.createDirectories(set);
+        try (var files = Files.list(VALLEY)) {
+            for (Path file : files.toList()) {
+                Files.copy(file, set.resolve(file.getFileName()));
+            }
+        }
+        String sound = Files.readString(set.resolve("aquifer.json"));
+        String wrong =
+                sound.replace("\"rock.tif\"", "\"rok.tif\"").replace("\"kind\": \"areal\"", "\"kind\": \"aerial\"");
+        Files.writeString(set.resolve("aquifer.json"), wrong);
+        window.answers.paths.add(Optional.of(set));
+        window.robot.clickOn("#choose-folder");
+        window.await(() -> isShown("#mend-folder"));
+        window.robot.clickOn("#mend-folder");
+        window.await(() -> isShown("#mend-text")
+                && window.robot.lookup(".sl-finding").tryQuery().isPresent());
+        window.robot.clickOn(".sl-finding");
+        TextArea text = find("#mend-text", TextArea.class);
+        assertThat(text.getSelectedText()).isEqualTo("\"aerial\"");
+        window.robot.interact(() -> text.replaceSelection("\"areal\""));
+        window.await(() -> window.robot.lookup(".sl-finding").queryAllAs(Button.class).stream()
+                .anyMatch(line -> line.getText().contains("rok.tif")));
+        window.robot.clickOn(".sl-finding");
+        assertThat(text.getSelectedText()).isEqualTo("\"rok.tif\"");
+        assertThat(find("#mend-save", Button.class).isDisabled()).isTrue();
+        window.robot.interact(() -> text.replaceSelection("\"rock.tif\""));
+        window.await(() -> !find("#mend-save", Button.class).isDisabled());
+        window.robot.clickOn("#mend-save");
+        window.await(() -> window.assembly().session().set().get().isPresent());
+        assertThat(Files.readString(set.resolve("aquifer.json"))).isEqualTo(sound);
+        assertThat(Files.readString(set.resolve("aquifer-before.json"))).isEqualTo(wrong);
+        assertThat(isShown("#mend")).isFalse();
     }
 }

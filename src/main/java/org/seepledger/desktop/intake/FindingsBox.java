@@ -3,8 +3,6 @@ package org.seepledger.desktop.intake;
 import java.util.List;
 import java.util.function.Consumer;
 import javafx.scene.control.Button;
-import javafx.scene.control.ContentDisplay;
-import javafx.scene.control.Label;
 import javafx.scene.layout.VBox;
 import javafx.scene.text.TextAlignment;
 import org.seepledger.desktop.words.Words;
@@ -26,17 +24,12 @@ final class FindingsBox extends VBox {
     }
 
     private Button line(Finding finding) {
-        Label mark = new Label(mark(finding.level()));
-        mark.getStyleClass().addAll("sl-mark-sign", style(finding.level()));
-        mark.setMinWidth(USE_PREF_SIZE);
-        Button line = new Button(finding.words(), mark);
-        line.setContentDisplay(ContentDisplay.TOP);
+        Button line = new Button(Words.of("intake.finding", mark(finding.level()), finding.words()));
         line.setWrapText(true);
         line.setTextAlignment(TextAlignment.LEFT);
-        line.getStyleClass().setAll("sl-finding");
+        line.getStyleClass().setAll("sl-finding", style(finding.level()));
         line.setMaxWidth(Double.MAX_VALUE);
         line.setMinSize(0, USE_PREF_SIZE);
-        line.setAccessibleText(mark.getText() + ": " + finding.words());
         line.setOnAction(pressed -> go.accept(finding));
         return line;
     }

@@ -10,6 +10,7 @@ import javafx.scene.control.Label;
 import javafx.scene.layout.ColumnConstraints;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.Priority;
+import javafx.scene.text.TextAlignment;
 import javafx.util.StringConverter;
 import org.seepledger.desktop.words.Words;
 
@@ -31,6 +32,7 @@ final class Form extends GridPane {
         Label label = new Label(words);
         label.getStyleClass().add("sl-muted");
         label.setWrapText(true);
+        label.setTextAlignment(TextAlignment.RIGHT);
         label.setLabelFor(field);
         addRow(getRowCount(), label, field);
     }

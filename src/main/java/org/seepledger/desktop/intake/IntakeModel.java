@@ -33,6 +33,7 @@ import org.seepledger.intake.Use;
 import org.seepledger.intake.Wishes;
 import org.seepledger.job.IntakeJob;
 import org.seepledger.job.RasterPreview;
+import org.seepledger.progress.Cancelled;
 
 /** Loose files, what they are taken for, and the aquifer folder that they make. */
 public final class IntakeModel {
@@ -78,11 +79,11 @@ public final class IntakeModel {
     public IntakeModel(Tasks tasks, FileDialogs dialogs, Consumer<Path> open) {
         this.dialogs = dialogs;
         this.open = open;
-        this.looking = tasks.latest("looking at files");
-        this.making = tasks.latest("putting an aquifer folder together");
-        this.checking = tasks.latest("checking an aquifer folder");
-        this.writing = tasks.latest("writing an aquifer folder");
-        this.previewing = tasks.latest("previewing a file");
+        this.looking = tasks.latest("task.intake.looking");
+        this.making = tasks.latest("task.intake.making");
+        this.checking = tasks.latest("task.intake.checking");
+        this.writing = tasks.latest("task.intake.writing");
+        this.previewing = tasks.latest("task.intake.preview");
     }
 
     /** {@return whether the assistant is before the user} */
@@ -173,7 +174,7 @@ public final class IntakeModel {
                 this::found,
                 fault -> {
                     brought.removeAll(paths);
-                    state.set(PaneState.failed(FaultWords.of(fault)));
+                    state.set(isStopped(fault) ? rest() : PaneState.failed(FaultWords.of(fault)));
                 });
     }
 
@@ -223,7 +224,16 @@ public final class IntakeModel {
                     return IntakeJob.check(copied, threads, progress);
                 },
                 text -> check.set(new Check(PaneState.READY, text)),
-                fault -> check.set(new Check(PaneState.failed(FaultWords.of(fault)), "")));
+                fault -> check.set(
+                        isStopped(fault) ? Check.NONE : new Check(PaneState.failed(FaultWords.of(fault)), "")));
+    }
+
+    private static boolean isStopped(Throwable fault) {
+        return fault instanceof Cancelled;
+    }
+
+    private PaneState rest() {
+        return plan.get().isEmpty() ? PaneState.empty(Words.of("intake.empty")) : PaneState.READY;
     }
 
     /** {@return the item looked at; empty for the set as a whole} */
@@ -346,7 +356,7 @@ public final class IntakeModel {
                     shown.set(false);
                     open.accept(folder);
                 },
-                fault -> written.set(PaneState.failed(FaultWords.of(fault))));
+                fault -> written.set(isStopped(fault) ? PaneState.READY : PaneState.failed(FaultWords.of(fault))));
     }
 
     /** Ends the writing; nothing is left of it. */

@@ -49,8 +49,6 @@ public final class IntakeView extends BorderPane {
         getStyleClass().add("sl-intake");
         setTop(bar(back));
         setCenter(new StatePane(panes(), model.state()).withAction(Words.of("intake.add.folder"), model::addFolder));
-        visibleProperty().bind(model.shown());
-        managedProperty().bind(model.shown());
         setOnDragOver(IntakeView::onDragOver);
         setOnDragDropped(this::onDropped);
         model.plan().addListener((now, before, after) -> show());
@@ -100,8 +98,7 @@ public final class IntakeView extends BorderPane {
         scroll.getStyleClass().add("sl-intake-item");
         SplitPane panes = new SplitPane(list, scroll, new OutcomePane(model, this::go));
         panes.setDividerPositions(0.22, 0.68);
-        list.setMinWidth(200);
-        SplitPane.setResizableWithParent(list, false);
+        list.setMinWidth(230);
         return panes;
     }
 

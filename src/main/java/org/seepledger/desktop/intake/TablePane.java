@@ -29,7 +29,7 @@ final class TablePane extends VBox {
         ScrollPane scroll = new ScrollPane(lines());
         scroll.getStyleClass().add("sl-preview");
         scroll.setVbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
-        scroll.setMinHeight(Math.min(LINES, item.file().look().lines()) * 22 + 96);
+        scroll.setMinHeight(Math.min(LINES, item.file().look().lines()) * 20 + 84);
         getChildren().addAll(facts(), scroll);
         for (int use = 0; use < item.uses().size(); use++) {
             getChildren().add(new UsePane(model, item, use));
@@ -38,7 +38,11 @@ final class TablePane extends VBox {
 
     private Label facts() {
         TableLook look = item.file().look();
-        String separator = look.separator() == '\t' ? Words.of("intake.table.tab") : String.valueOf(look.separator());
+        String separator = switch (look.separator()) {
+            case '\t' -> Words.of("intake.table.tab");
+            case ';' -> Words.of("intake.table.semicolon");
+            default -> Words.of("intake.table.comma");
+        };
         return new Label(Words.of("intake.table", look.lines(), look.columns().size(), separator));
     }
 

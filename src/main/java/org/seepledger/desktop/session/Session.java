@@ -1,6 +1,7 @@
 package org.seepledger.desktop.session;
 
 import java.util.Optional;
+import java.util.TreeMap;
 import javafx.beans.property.IntegerProperty;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyObjectProperty;
@@ -9,6 +10,10 @@ import javafx.beans.property.SimpleIntegerProperty;
 import javafx.beans.property.SimpleObjectProperty;
 import javafx.beans.property.SimpleStringProperty;
 import javafx.beans.property.StringProperty;
+import javafx.collections.FXCollections;
+import javafx.collections.ObservableMap;
+import org.seepledger.desktop.notice.Notices;
+import org.seepledger.job.ShownPicture;
 import org.seepledger.prism.Prism;
 import org.seepledger.report.CellPlace;
 
@@ -17,11 +22,15 @@ public final class Session {
 
     private final ReadOnlyObjectWrapper<Optional<OpenSet>> set = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final ObjectProperty<Drawing> drawing = new SimpleObjectProperty<>(Drawing.NONE);
+    private final ObjectProperty<DrawnShapes> shapes = new SimpleObjectProperty<>(DrawnShapes.NONE);
+    private final ObservableMap<String, ShownPicture> pictures = FXCollections.observableMap(new TreeMap<>());
     private final IntegerProperty interval = new SimpleIntegerProperty();
     private final IntegerProperty layer = new SimpleIntegerProperty();
     private final StringProperty selected = new SimpleStringProperty("");
     private final StringProperty lit = new SimpleStringProperty("");
+    private final StringProperty solute = new SimpleStringProperty("");
     private final StringProperty status = new SimpleStringProperty("");
+    private final Notices notices = new Notices();
     private final ObjectProperty<FaceFlows> faceFlows = new SimpleObjectProperty<>(FaceFlows.NONE);
     private final ObjectProperty<Optional<CellPlace>> target = new SimpleObjectProperty<>(Optional.empty());
     private final ObjectProperty<Demand> demand = new SimpleObjectProperty<>(Demand.NONE);
@@ -44,6 +53,7 @@ public final class Session {
     public void show(Optional<OpenSet> opened) {
         lit.set("");
         faceFlows.set(FaceFlows.NONE);
+        solute.set("");
         selected.set("");
         interval.set(0);
         layer.set(0);
@@ -59,6 +69,16 @@ public final class Session {
     /** {@return what is drawn} */
     public ObjectProperty<Drawing> drawing() {
         return drawing;
+    }
+
+    /** {@return what is drawn as shapes, for what writes it to a file} */
+    public ObjectProperty<DrawnShapes> shapes() {
+        return shapes;
+    }
+
+    /** {@return the pictures that views offer for handing over, by what they are called there; a view keeps its own up} */
+    public ObservableMap<String, ShownPicture> pictures() {
+        return pictures;
     }
 
     /** {@return the interval looked at, from 0} */
@@ -86,7 +106,17 @@ public final class Session {
         return lit;
     }
 
-    /** {@return what the status line says} */
+    /** {@return what has been done, what to know, what was refused} */
+    public Notices notices() {
+        return notices;
+    }
+
+    /** {@return the name of the solute whose budget is looked at; empty for water's} */
+    public StringProperty solute() {
+        return solute;
+    }
+
+    /** {@return what the status line says can be done now} */
     public StringProperty status() {
         return status;
     }

@@ -4,6 +4,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
+import java.util.concurrent.atomic.AtomicReference;
 import java.util.function.Consumer;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
@@ -19,6 +20,7 @@ import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.words.FaultWords;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.io.aquifer.AquiferReader;
+import org.seepledger.progress.Cancelled;
 
 /** What can be opened, and the opening of it. */
 public final class WelcomeModel {
@@ -31,8 +33,9 @@ public final class WelcomeModel {
     private final Lane looking;
     private final ObservableList<Place> samples = FXCollections.observableArrayList();
     private final ObservableList<Place> recent = FXCollections.observableArrayList();
-    private final ReadOnlyObjectWrapper<Optional<Path>> failed = new ReadOnlyObjectWrapper<>(Optional.empty());
+    private final ReadOnlyObjectWrapper<Optional<Broken>> failed = new ReadOnlyObjectWrapper<>(Optional.empty());
     private Consumer<List<Path>> loose = paths -> {};
+    private Consumer<Path> wrong = folder -> {};
     private final ReadOnlyObjectWrapper<PaneState> state = new ReadOnlyObjectWrapper<>(PaneState.READY);
 
     /**
@@ -54,8 +57,8 @@ public final class WelcomeModel {
         this.dialogs = dialogs;
         this.folders = folders;
         this.opened = opened;
-        this.opening = tasks.latest("opening");
-        this.looking = tasks.latest("looking for folders");
+        this.opening = tasks.latest("task.opening");
+        this.looking = tasks.latest("task.looking");
     }
 
     /**
@@ -112,16 +115,22 @@ public final class WelcomeModel {
     private void read(Path folder) {
         failed.set(Optional.empty());
         state.set(PaneState.working(Words.of("open.working", folder.getFileName())));
+        AtomicReference<Optional<Broken>> broken = new AtomicReference<>(Optional.empty());
         opening.run(
-                progress -> Opening.of(folder),
+                progress -> {
+                    progress.begin(folder.toString(), 0);
+                    broken.set(Broken.of(folder));
+                    return Opening.of(folder);
+                },
                 result -> {
                     state.set(PaneState.READY);
                     folders.remember(result.set().path());
                     opened.accept(result);
                 },
                 fault -> {
-                    failed.set(Optional.of(folder));
-                    state.set(PaneState.failed(FaultWords.of(fault)));
+                    boolean stopped = fault instanceof Cancelled;
+                    failed.set(stopped ? Optional.empty() : broken.get());
+                    state.set(stopped ? PaneState.READY : PaneState.failed(FaultWords.of(fault)));
                 });
     }
 
@@ -139,13 +148,28 @@ public final class WelcomeModel {
         loose.accept(List.of());
     }
 
-    /** Brings the files of the folder that could not be opened. */
-    void bringFailed() {
-        failed.get().ifPresent(folder -> loose.accept(List.of(folder)));
+    /**
+     * Takes folders whose description is wrong.
+     *
+     * @param taker gets them
+     */
+    public void whenWrong(Consumer<Path> taker) {
+        wrong = taker;
     }
 
-    /** {@return the folder that could not be opened and has no description, if it is so} */
-    ReadOnlyObjectProperty<Optional<Path>> failed() {
+    /** Mends the description of the folder that could not be opened; without one, brings its files. */
+    void mendFailed() {
+        failed.get().ifPresent(broken -> {
+            if (broken.described()) {
+                wrong.accept(broken.folder());
+            } else {
+                loose.accept(List.of(broken.folder()));
+            }
+        });
+    }
+
+    /** {@return the folder that could not be opened, if it is so} */
+    ReadOnlyObjectProperty<Optional<Broken>> failed() {
         return failed.getReadOnlyProperty();
     }
 

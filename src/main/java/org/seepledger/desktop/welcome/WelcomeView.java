@@ -28,7 +28,7 @@ public final class WelcomeView extends StackPane {
     private final WelcomeModel model;
     private final VBox drop = new VBox();
     private final Label fault = new Label();
-    private final Button mend = new Button(Words.of("welcome.mend"));
+    private final Button mend = new Button();
     private final HBox failure = new HBox(12, fault, mend);
 
     /**
@@ -39,6 +39,7 @@ public final class WelcomeView extends StackPane {
     public WelcomeView(WelcomeModel model) {
         this.model = model;
         setId("welcome");
+        getStyleClass().add("sl-pane");
         VBox page = new VBox(title(), fault(), columns());
         page.getStyleClass().add("sl-welcome");
         page.setMaxWidth(WIDTH + 96);
@@ -71,7 +72,7 @@ public final class WelcomeView extends StackPane {
         HBox.setHgrow(fault, Priority.ALWAYS);
         mend.setId("mend-folder");
         mend.setMinWidth(USE_PREF_SIZE);
-        mend.setOnAction(pressed -> model.bringFailed());
+        mend.setOnAction(pressed -> model.mendFailed());
         failure.getStyleClass().add("sl-fault");
         failure.setAlignment(Pos.CENTER_LEFT);
         failure.setMaxWidth(WIDTH);
@@ -86,6 +87,8 @@ public final class WelcomeView extends StackPane {
         failure.setVisible(failed);
         failure.setManaged(failed);
         mend.setVisible(model.failed().get().isPresent());
+        boolean described = model.failed().get().filter(Broken::described).isPresent();
+        mend.setText(described ? Words.of("welcome.mend") : Words.of("welcome.files"));
     }
 
     private Node columns() {
