@@ -11,6 +11,7 @@ import javafx.scene.input.KeyCode;
 import javafx.stage.Stage;
 import org.seepledger.desktop.port.GivenAnswers;
 import org.seepledger.desktop.task.BackgroundTasks;
+import org.seepledger.desktop.task.Tasks;
 import org.testfx.api.FxRobot;
 import org.testfx.api.FxToolkit;
 import org.testfx.util.WaitForAsyncUtils;
@@ -92,6 +93,11 @@ public final class OpenWindow implements AutoCloseable {
 
     Assembly assembly() {
         return assembly;
+    }
+
+    /** {@return where work is done} */
+    Tasks tasks() {
+        return tasks;
     }
 
     Stage stage() {

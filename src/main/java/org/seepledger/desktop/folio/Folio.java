@@ -24,6 +24,9 @@ import org.seepledger.desktop.origin.OriginView;
 import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.session.Session;
+import org.seepledger.desktop.solute.LivePlume;
+import org.seepledger.desktop.solute.MassReading;
+import org.seepledger.desktop.solute.SoluteLook;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.theme.Theme;
 import org.seepledger.desktop.words.Words;
@@ -36,6 +39,8 @@ public final class Folio {
     private final BorderPane pages = new BorderPane();
     private final ToggleGroup chosen = new ToggleGroup();
     private final HBox marks = new HBox();
+    private final LiveBudget live;
+    private final Session session;
     private final LedgerModel ledger;
     private final Node ribbon;
 
@@ -49,10 +54,13 @@ public final class Folio {
      * @param theme light or dark
      */
     public Folio(Session session, Tasks tasks, FileDialogs dialogs, CopyBoard copies, ObservableValue<Theme> theme) {
+        this.session = session;
         Reading reading = new Reading(session);
-        LiveBudget live = new LiveBudget(session, tasks);
+        this.live = new LiveBudget(session, tasks);
         new FaceFeed(session, live, reading).begin();
-        this.ledger = new LedgerModel(session, live, reading, copies);
+        SoluteLook look = new SoluteLook(session);
+        LivePlume plumes = new LivePlume(session, look, tasks);
+        this.ledger = new LedgerModel(session, live, reading, plumes, new MassReading(session, reading), copies);
         pages.setId("folio");
         pages.getStyleClass().add("sl-folio");
         marks.getStyleClass().add("sl-marks");
@@ -63,6 +71,7 @@ public final class Folio {
         // Before the model, which takes the question away.
         session.asked().addListener((asked, before, after) -> after.ifPresent(row -> open(ORIGIN)));
         add("folio.origin", new OriginView(new OriginModel(session, reading, tasks, dialogs, copies)));
+        marks.getChildren().add(new SubjectBox(session));
         pages.setTop(marks);
         chosen.selectToggle(chosen.getToggles().get(0));
         this.ribbon = new ChartView(new ChartModel(session, live, reading), theme);
@@ -98,6 +107,11 @@ public final class Folio {
         return ribbon;
     }
 
+    /** Works out again what was stopped or failed. */
+    public void again() {
+        live.again();
+    }
+
     /** {@return what can be done here} */
     public List<Action> actions() {
         String group = "actions.group.budget";
@@ -107,6 +121,7 @@ public final class Folio {
                 new Action(group, "action.page.exchange", "Shortcut+3", () -> open(2)),
                 new Action(group, "action.page.origin", "Shortcut+4", () -> open(ORIGIN)),
                 new Action(group, "action.ledger.origin", "Shortcut+T", ledger::askOrigin),
+                new Action(group, "action.subject", "Shortcut+Shift+U", () -> SubjectBox.next(session)),
                 new Action(group, "action.ledger.copy", "Shortcut+Shift+C", ledger::copy),
                 new Action(
                         group,

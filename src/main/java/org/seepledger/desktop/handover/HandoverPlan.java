@@ -88,7 +88,8 @@ final class HandoverPlan {
                 Optional.empty(),
                 budget.clip().get(),
                 threads(),
-                false);
+                false,
+                chosen.report().request());
     }
 
     private ExtractRequest extract() {
@@ -113,7 +114,8 @@ final class HandoverPlan {
             commands.add(chosen.report().into(chosen.budget().into(balance)));
         }
         if (chosen.plume().get()) {
-            commands.add(chosen.solutes().into(chosen.budget().into(command("plume", HandoverRequest.SOLUTES))));
+            CommandText plume = chosen.budget().into(command("plume", HandoverRequest.SOLUTES));
+            commands.add(chosen.report().into(chosen.solutes().into(plume)));
         }
         if (chosen.extract().get()) {
             commands.add(command("extract", HandoverRequest.EXTRACT)

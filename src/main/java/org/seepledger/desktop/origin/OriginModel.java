@@ -32,6 +32,7 @@ import org.seepledger.job.TraceJob;
 import org.seepledger.job.TracedNumber;
 import org.seepledger.job.TracedNumber.Line;
 import org.seepledger.prism.Prism;
+import org.seepledger.progress.Cancelled;
 import org.seepledger.report.CellPlace;
 import org.seepledger.report.Wording;
 import org.seepledger.unit.Figures;
@@ -76,8 +77,8 @@ public final class OriginModel {
         this.reading = reading;
         this.dialogs = dialogs;
         this.copies = copies;
-        this.tracing = tasks.latest("tracing a row");
-        this.writing = tasks.latest("writing a trace");
+        this.tracing = tasks.latest("task.trace");
+        this.writing = tasks.latest("task.trace.writing");
         session.asked().addListener((asked, before, after) -> after.ifPresent(this::ask));
         session.set().addListener((set, before, after) -> clear(nothing()));
         session.drawing().addListener((drawing, before, after) -> showRemark());
@@ -110,8 +111,9 @@ public final class OriginModel {
         if (set.isEmpty() || prism.isEmpty()) {
             return;
         }
-        if (row.item().isEmpty()) {
-            state.set(PaneState.empty(Words.of("origin.group")));
+        if (!session.solute().get().isEmpty() || row.item().isEmpty()) {
+            boolean water = session.solute().get().isEmpty();
+            state.set(PaneState.empty(Words.of(water ? "origin.group" : "origin.solute")));
             return;
         }
         trace(Question.of(
@@ -138,10 +140,16 @@ public final class OriginModel {
                     return asked.answer(MOST, progress);
                 },
                 this::answered,
-                fault -> {
-                    command.set("");
-                    state.set(PaneState.failed(FaultWords.of(fault)));
-                });
+                this::notAnswered);
+    }
+
+    private void notAnswered(Throwable fault) {
+        if (fault instanceof Cancelled) {
+            clear(nothing());
+        } else {
+            command.set("");
+            state.set(PaneState.failed(FaultWords.of(fault)));
+        }
     }
 
     private void answered(TracedNumber number) {
@@ -247,14 +255,16 @@ public final class OriginModel {
     public void copyCommand() {
         if (!command.get().isEmpty()) {
             copies.text(command.get());
-            session.status().set(Words.of("origin.copied"));
+            session.notices().done(Words.of("origin.copied"));
         }
     }
 
     /** Writes the whole trace, as the command does, to a file that is asked for. */
     public void export() {
+        if (!remark.get().isEmpty()) {
+            session.notices().refuse(remark.get());
+        }
         if (answer.isEmpty() || !remark.get().isEmpty()) {
-            session.status().set(remark.get());
             return;
         }
         Question asked = question.orElseThrow();
@@ -271,8 +281,8 @@ public final class OriginModel {
                     TraceJob.run(asked.request(file), progress);
                     return file;
                 },
-                written -> session.status().set(Words.of("origin.written", written)),
-                fault -> session.status().set(FaultWords.of(fault)));
+                written -> session.notices().done(Words.of("origin.written", written)),
+                fault -> session.notices().refuse(FaultWords.of(fault)));
     }
 
     /** {@return the values, the largest contribution first} */

@@ -13,6 +13,7 @@ import javafx.beans.property.SimpleStringProperty;
 import javafx.beans.property.StringProperty;
 import javafx.collections.FXCollections;
 import javafx.collections.ObservableMap;
+import org.seepledger.desktop.notice.Notices;
 import org.seepledger.job.ShownPicture;
 import org.seepledger.job.TracedNumber;
 import org.seepledger.prism.Prism;
@@ -31,7 +32,9 @@ public final class Session {
     private final StringProperty lit = new SimpleStringProperty("");
     private final ObjectProperty<List<TracedNumber.Cell>> marked = new SimpleObjectProperty<>(List.of());
     private final ObjectProperty<Optional<RowAsked>> asked = new SimpleObjectProperty<>(Optional.empty());
+    private final StringProperty solute = new SimpleStringProperty("");
     private final StringProperty status = new SimpleStringProperty("");
+    private final Notices notices = new Notices();
     private final ObjectProperty<FaceFlows> faceFlows = new SimpleObjectProperty<>(FaceFlows.NONE);
     private final ObjectProperty<Optional<CellPlace>> target = new SimpleObjectProperty<>(Optional.empty());
     private final ObjectProperty<Demand> demand = new SimpleObjectProperty<>(Demand.NONE);
@@ -55,6 +58,7 @@ public final class Session {
         lit.set("");
         marked.set(List.of());
         faceFlows.set(FaceFlows.NONE);
+        solute.set("");
         selected.set("");
         interval.set(0);
         layer.set(0);
@@ -117,7 +121,17 @@ public final class Session {
         return asked;
     }
 
-    /** {@return what the status line says} */
+    /** {@return what has been done, what to know, what was refused} */
+    public Notices notices() {
+        return notices;
+    }
+
+    /** {@return the name of the solute whose budget is looked at; empty for water's} */
+    public StringProperty solute() {
+        return solute;
+    }
+
+    /** {@return what the status line says can be done now} */
     public StringProperty status() {
         return status;
     }
