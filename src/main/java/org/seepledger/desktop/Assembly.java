@@ -101,7 +101,7 @@ final class Assembly {
         draft.version().addListener((version, before, after) -> mapView.repaint());
         draft.tool().addListener((tool, before, after) -> mapView.repaint());
         this.running = new RunningModel(outside.tasks()::running);
-        this.folio = new Folio(session, outside.tasks(), outside.copies(), shell.theme());
+        this.folio = new Folio(session, outside.tasks(), outside.dialogs(), outside.copies(), shell.theme());
         Slots slots = new Slots(
                 firstPages(), new ShowingBar(map), mapView, Optional.of(folio.pages()), Optional.of(folio.ribbon()));
         this.view = new ShellView(shell, slots, actions, running, outside.settings());
