@@ -15,15 +15,8 @@ final class Vocabulary {
     /** Longer phrases first, since they say more than the words in them. */
     private static final Map<String, Role> PHRASES = phrases();
 
-    private static final Set<String> SURFACES = Set.of(
-            "surface",
-            "surfaces",
-            "interface",
-            "interfaces",
-            "horizons",
-            "elevation",
-            "elevations",
-            "elev");
+    private static final Set<String> SURFACES =
+            Set.of("surface", "surfaces", "interface", "interfaces", "horizons", "elevation", "elevations", "elev");
 
     private Vocabulary() {}
 
@@ -217,18 +210,7 @@ final class Vocabulary {
                 "elev",
                 "tops",
                 "top");
-        put(
-                phrases,
-                Role.BOTTOM,
-                "bottoms",
-                "bottom",
-                "base",
-                "bedrock",
-                "basement",
-                "floor",
-                "bot",
-                "botm",
-                "rock");
+        put(phrases, Role.BOTTOM, "bottoms", "bottom", "base", "bedrock", "basement", "floor", "bot", "botm", "rock");
         return phrases;
     }
 
@@ -241,7 +223,13 @@ final class Vocabulary {
     /** {@return whether a name speaks of surfaces between layers without saying which} */
     static boolean saysSurfaces(String name) {
         List<String> words = words(name);
-        return words.stream().anyMatch(SURFACES::contains) && words.stream().noneMatch(Set.of("ground", "land")::contains);
+        return words.stream().anyMatch(SURFACES::contains)
+                && words.stream().noneMatch(Set.of("ground", "land")::contains);
+    }
+
+    /** {@return a heading without what stands in brackets at its end} */
+    static String withoutUnit(String heading) {
+        return heading.replaceAll("\\s*[\\[(][^\\[(]*[\\])]\\s*$", "");
     }
 
     /** {@return the words of a name, in lower case: letters apart from digits, and {@code bigWords} apart} */

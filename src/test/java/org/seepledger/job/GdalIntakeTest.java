@@ -52,7 +52,8 @@ class GdalIntakeTest {
         Path target = folder.resolve("loose").resolve(to);
         Files.createDirectories(target.getParent());
         Path stack = folder.resolve("stack.vrt");
-        List<String> build = new ArrayList<>(List.of("gdalbuildvrt", "-q", "-overwrite", "-separate", stack.toString()));
+        List<String> build =
+                new ArrayList<>(List.of("gdalbuildvrt", "-q", "-overwrite", "-separate", stack.toString()));
         names.forEach(name -> build.add(VALLEY.resolve(name).toAbsolutePath().toString()));
         run(build);
         List<String> translate = new ArrayList<>(List.of("gdalwarp", "-q", "-ot", "Float64", "-dstnodata", "-9999"));

@@ -66,12 +66,12 @@ final class ItemRows {
     }
 
     private static Mark of(Item item, List<Finding> findings) {
-        if (!item.isUsed()) {
-            return Mark.UNUSED;
-        }
         Mark worst = worst(findings.stream()
                 .filter(finding -> finding.item().equals(Optional.of(item.id())))
                 .toList());
+        if (!item.isUsed()) {
+            return worst == Mark.FINE ? Mark.UNUSED : worst;
+        }
         boolean weak = item.uses().stream()
                 .anyMatch(use -> use.role() != Role.NONE && use.guess().confidence() == Guess.Confidence.LOW);
         return worst == Mark.FINE && weak ? Mark.DOUBT : worst;
