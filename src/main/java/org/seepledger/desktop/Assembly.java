@@ -3,7 +3,11 @@ package org.seepledger.desktop;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
+import javafx.beans.binding.Bindings;
+import javafx.beans.binding.BooleanBinding;
+import javafx.scene.Node;
 import javafx.scene.Scene;
+import javafx.scene.layout.StackPane;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.desktop.action.Action;
 import org.seepledger.desktop.action.Actions;
@@ -16,6 +20,10 @@ import org.seepledger.desktop.draw.Tray;
 import org.seepledger.desktop.folio.Folio;
 import org.seepledger.desktop.handover.HandoverModel;
 import org.seepledger.desktop.handover.HandoverPage;
+import org.seepledger.desktop.intake.IntakeModel;
+import org.seepledger.desktop.intake.IntakeView;
+import org.seepledger.desktop.intake.MendModel;
+import org.seepledger.desktop.intake.MendView;
 import org.seepledger.desktop.map.GroundModel;
 import org.seepledger.desktop.map.MapModel;
 import org.seepledger.desktop.map.MapView;
@@ -48,6 +56,8 @@ final class Assembly {
     private final Session session = new Session();
     private final ShellModel shell = new ShellModel(session);
     private final WelcomeModel welcome;
+    private final IntakeModel intake;
+    private final MendModel mend;
     private final MapModel map;
     private final DraftModel draft;
     private final DraftHand hand;
@@ -74,6 +84,10 @@ final class Assembly {
         this.map = new MapModel(session, outside.tasks());
         this.welcome = new WelcomeModel(
                 outside.tasks(), outside.dialogs(), outside.folders(), this::show, go -> files().whenSafe(go));
+        this.intake = new IntakeModel(outside.tasks(), outside.dialogs(), welcome::open);
+        this.mend = new MendModel(outside.tasks(), welcome::open);
+        welcome.whenLoose(this::bring);
+        welcome.whenWrong(mend::mend);
         Actions actions = new Actions();
         this.draft = new DraftModel(session);
         this.hand = new DraftHand(draft);
@@ -89,13 +103,9 @@ final class Assembly {
         draft.version().addListener((version, before, after) -> mapView.repaint());
         draft.tool().addListener((tool, before, after) -> mapView.repaint());
         this.running = new RunningModel(outside.tasks()::running);
-        this.folio = new Folio(session, outside.tasks(), outside.copies(), shell.theme());
+        this.folio = new Folio(session, outside.tasks(), outside.dialogs(), outside.copies(), shell.theme());
         Slots slots = new Slots(
-                new WelcomeView(welcome),
-                new ShowingBar(map),
-                mapView,
-                Optional.of(folio.pages()),
-                Optional.of(folio.ribbon()));
+                firstPages(), new ShowingBar(map), mapView, Optional.of(folio.pages()), Optional.of(folio.ribbon()));
         this.view = new ShellView(shell, slots, actions, running, outside.settings());
         FolderDrop.on(view, welcome, over -> session.status().set(over ? Words.of("drop.open") : ""));
         actions.add(actionsOfWindow());
@@ -120,6 +130,7 @@ final class Assembly {
         return List.of(
                 new Action(window, "action.list", "F1", view::showActions),
                 new Action(window, "action.open", "Shortcut+O", welcome::choose),
+                new Action(window, "action.intake", "Shortcut+Shift+O", this::turnToIntake),
                 new Action(window, "action.welcome", "Shortcut+Home", shell::turnPage),
                 new Action(window, "action.theme", "F9", shell::switchTheme),
                 new Action(window, "action.pane", "F6", view::nextPane),
@@ -134,6 +145,38 @@ final class Assembly {
                 new Action(time, "action.earlier", "Comma", () -> shell.move(-1)),
                 new Action(time, "action.deeper", "Page Down", () -> shell.sink(1)),
                 new Action(time, "action.higher", "Page Up", () -> shell.sink(-1)));
+    }
+
+    /** One behind the other; what is behind is hidden from the keyboard too. */
+    private Node firstPages() {
+        WelcomeView first = new WelcomeView(welcome);
+        IntakeView loose = new IntakeView(intake, this::leaveIntake);
+        MendView wrong = new MendView(mend);
+        BooleanBinding mending =
+                Bindings.createBooleanBinding(() -> mend.folder().get().isPresent(), mend.folder());
+        first.visibleProperty().bind(intake.shown().or(mending).not());
+        loose.visibleProperty().bind(intake.shown().and(mending.not()));
+        wrong.visibleProperty().bind(mending);
+        return new StackPane(first, loose, wrong);
+    }
+
+    private void turnToIntake() {
+        if (intake.shown().get() && shell.atWelcome().get()) {
+            leaveIntake();
+        } else {
+            bring(List.of());
+        }
+    }
+
+    /** Shows the import assistant, with more files. */
+    private void bring(List<Path> paths) {
+        shell.atWelcome().set(true);
+        intake.bring(paths);
+    }
+
+    private void leaveIntake() {
+        intake.shown().set(false);
+        shell.atWelcome().set(session.set().get().isEmpty());
     }
 
     private void again() {
@@ -203,5 +246,13 @@ final class Assembly {
 
     WelcomeModel welcome() {
         return welcome;
+    }
+
+    MendModel mend() {
+        return mend;
+    }
+
+    IntakeModel intake() {
+        return intake;
     }
 }
