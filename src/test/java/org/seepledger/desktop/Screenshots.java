@@ -1,15 +1,14 @@
 package org.seepledger.desktop;
 
-import java.awt.image.BufferedImage;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import javafx.scene.image.Image;
 import javafx.scene.image.PixelFormat;
-import javax.imageio.ImageIO;
+import javafx.scene.input.KeyCode;
 import org.seepledger.desktop.theme.Theme;
 
-/** Writes pictures of each view, light and dark, in two sizes, into the folder given. */
+/** Writes small pictures of each view, light and dark, in two sizes, into the folder given. */
 public final class Screenshots {
 
     private Screenshots() {}
@@ -39,11 +38,16 @@ public final class Screenshots {
                     window.assembly().map().showPrism();
                     window.assembly().tray().flipCard();
                 });
-                window.robot.press(javafx.scene.input.KeyCode.TAB).release(javafx.scene.input.KeyCode.TAB);
+                window.robot.press(KeyCode.TAB).release(KeyCode.TAB);
                 window.settle();
                 both(window, folder, "draw", suffix);
                 window.robot.interact(() -> window.assembly().tray().flipCard());
-                window.robot.press(javafx.scene.input.KeyCode.F1).release(javafx.scene.input.KeyCode.F1);
+                window.robot.press(KeyCode.SHIFT, KeyCode.F6).release(KeyCode.F6, KeyCode.SHIFT);
+                window.robot.clickOn("#fold-below").clickOn("#legend-title");
+                window.settle();
+                both(window, folder, "wide", suffix);
+                window.robot.clickOn("#legend-title").clickOn("#fold-side").clickOn("#fold-below");
+                window.robot.press(KeyCode.F1).release(KeyCode.F1);
                 window.settle();
                 both(window, folder, "actions", suffix);
             }
@@ -67,8 +71,6 @@ public final class Screenshots {
         int height = (int) taken[0].getHeight();
         int[] pixels = new int[width * height];
         taken[0].getPixelReader().getPixels(0, 0, width, height, PixelFormat.getIntArgbInstance(), pixels, 0, width);
-        BufferedImage picture = new BufferedImage(width, height, BufferedImage.TYPE_INT_RGB);
-        picture.setRGB(0, 0, width, height, pixels, 0, width);
-        ImageIO.write(picture, "png", file.toFile());
+        IndexedPng.write(pixels, width, height, file);
     }
 }
