@@ -34,6 +34,7 @@ import org.seepledger.desktop.port.Opener;
 import org.seepledger.desktop.port.Questions;
 import org.seepledger.desktop.port.RecentFolders;
 import org.seepledger.desktop.running.RunningModel;
+import org.seepledger.desktop.running.RunningStrip;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Opening;
 import org.seepledger.desktop.session.Session;
@@ -143,7 +144,7 @@ final class Assembly {
     /** One behind the other; what is behind is hidden from the keyboard too. */
     private Node firstPages() {
         WelcomeView first = new WelcomeView(welcome);
-        IntakeView loose = new IntakeView(intake, this::leaveIntake);
+        IntakeView loose = new IntakeView(intake, new RunningStrip(running, this::listRunning), this::leaveIntake);
         MendView wrong = new MendView(mend);
         BooleanBinding mending =
                 Bindings.createBooleanBinding(() -> mend.folder().get().isPresent(), mend.folder());
@@ -151,6 +152,10 @@ final class Assembly {
         loose.visibleProperty().bind(intake.shown().and(mending.not()));
         wrong.visibleProperty().bind(mending);
         return new StackPane(first, loose, wrong);
+    }
+
+    private void listRunning() {
+        view.showRunning();
     }
 
     private void turnToIntake() {

@@ -228,8 +228,8 @@ final class SetText {
                     "There is more than one interval and no storage: change in storage, residual and closure error stay"
                             + " unknown. Bring specific yield and specific storage, or type them."));
         }
-        if (!set.containsKey("head")
-                && LayerWishes.waterTables(plan, binder.layers()).contains(true)) {
+        boolean headless = !set.containsKey("head") && binder.parts(Role.HEAD).isEmpty();
+        if (headless && LayerWishes.waterTables(plan, binder.layers()).contains(true)) {
             findings.accept(Finding.doubt(
                     Topic.HEAD,
                     "There are no heads: water-table layers are taken as saturated to their top, and storage is unknown"

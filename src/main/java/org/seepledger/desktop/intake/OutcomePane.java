@@ -7,6 +7,7 @@ import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TextArea;
 import javafx.scene.control.TextField;
+import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
@@ -69,6 +70,9 @@ final class OutcomePane extends VBox {
         describe.setOnAction(pressed -> model.describe());
         cancel.setId("intake-cancel");
         cancel.setOnAction(pressed -> model.cancel());
+        for (Button button : List.of(write, describe, cancel, choose)) {
+            button.setMinWidth(USE_PREF_SIZE);
+        }
         for (Label label : List.of(size, obstacles, written)) {
             label.setWrapText(true);
             label.setMinHeight(USE_PREF_SIZE);
@@ -79,7 +83,13 @@ final class OutcomePane extends VBox {
         Label where = new Label(Words.of("intake.target.label"));
         where.getStyleClass().add("sl-muted");
         return new VBox(
-                8, where, new HBox(6, target, choose), size, new HBox(8, write, describe, cancel), obstacles, written);
+                8,
+                where,
+                new HBox(6, target, choose),
+                size,
+                new FlowPane(8, 8, write, describe, cancel),
+                obstacles,
+                written);
     }
 
     private void show() {
@@ -105,6 +115,7 @@ final class OutcomePane extends VBox {
         written.setText(state.words());
         written.setManaged(!state.words().isEmpty());
         cancel.setVisible(working);
+        cancel.setManaged(working);
         boolean sound = !failed
                 && model.made()
                         .get()
