@@ -33,6 +33,7 @@ import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.port.Opener;
 import org.seepledger.desktop.port.Questions;
 import org.seepledger.desktop.port.RecentFolders;
+import org.seepledger.desktop.port.Settings;
 import org.seepledger.desktop.running.RunningModel;
 import org.seepledger.desktop.running.RunningStrip;
 import org.seepledger.desktop.session.OpenSet;
@@ -74,6 +75,7 @@ final class Assembly {
             Questions questions,
             CopyBoard copies,
             RecentFolders folders,
+            Settings settings,
             Opener opener) {}
 
     Assembly(Outside outside, List<Path> samplePlaces) {
@@ -100,10 +102,10 @@ final class Assembly {
         draft.version().addListener((version, before, after) -> mapView.repaint());
         draft.tool().addListener((tool, before, after) -> mapView.repaint());
         this.running = new RunningModel(outside.tasks()::running);
-        this.folio = new Folio(session, outside.tasks(), outside.copies(), shell.theme());
+        this.folio = new Folio(session, outside.tasks(), outside.dialogs(), outside.copies(), shell.theme());
         Slots slots = new Slots(
                 firstPages(), new ShowingBar(map), mapView, Optional.of(folio.pages()), Optional.of(folio.ribbon()));
-        this.view = new ShellView(shell, slots, actions, running);
+        this.view = new ShellView(shell, slots, actions, running, outside.settings());
         actions.add(actionsOfWindow());
         actions.add(mapView.actions());
         actions.add(new DraftActions(draft, hand, files, tray, mapView::repaint).all(map));
@@ -130,6 +132,8 @@ final class Assembly {
                 new Action(window, "action.welcome", "Shortcut+Home", shell::turnPage),
                 new Action(window, "action.theme", "F9", shell::switchTheme),
                 new Action(window, "action.pane", "F6", view::nextPane),
+                new Action(window, "action.fold.side", "Shift+F6", view::turnSide),
+                new Action(window, "action.fold.below", "Shortcut+F6", view::turnBelow),
                 new Action(window, "action.caution", "Shift+F1", view::showCaution),
                 new Action(window, "action.notices", "F7", view::showNotices),
                 new Action(window, "action.running", "F10", view::showRunning),
