@@ -15,6 +15,7 @@ import org.seepledger.desktop.draw.DraftActions;
 import org.seepledger.desktop.draw.DraftFiles;
 import org.seepledger.desktop.draw.DraftHand;
 import org.seepledger.desktop.draw.DraftModel;
+import org.seepledger.desktop.draw.LidSurfaces;
 import org.seepledger.desktop.draw.Tray;
 import org.seepledger.desktop.folio.Folio;
 import org.seepledger.desktop.handover.HandoverModel;
@@ -44,6 +45,7 @@ import org.seepledger.desktop.shell.ShellView;
 import org.seepledger.desktop.shell.Slots;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.theme.Dress;
+import org.seepledger.desktop.welcome.FolderDrop;
 import org.seepledger.desktop.welcome.WelcomeModel;
 import org.seepledger.desktop.welcome.WelcomeView;
 import org.seepledger.desktop.words.Words;
@@ -91,7 +93,7 @@ final class Assembly {
         this.draft = new DraftModel(session);
         this.hand = new DraftHand(draft);
         this.files = new DraftFiles(draft, outside.tasks(), outside.dialogs(), outside.questions());
-        this.tray = new Tray(draft, hand);
+        this.tray = new Tray(draft, hand, new LidSurfaces(draft, outside.tasks(), outside.dialogs()));
         this.mapView = new MapView(
                 map,
                 new GroundModel(session, outside.tasks(), outside.dialogs()),
@@ -106,6 +108,7 @@ final class Assembly {
         Slots slots = new Slots(
                 firstPages(), new ShowingBar(map), mapView, Optional.of(folio.pages()), Optional.of(folio.ribbon()));
         this.view = new ShellView(shell, slots, actions, running, outside.settings());
+        FolderDrop.on(view, welcome, over -> session.status().set(over ? Words.of("drop.open") : ""));
         actions.add(actionsOfWindow());
         actions.add(mapView.actions());
         actions.add(new DraftActions(draft, hand, files, tray, mapView::repaint).all(map));

@@ -66,7 +66,7 @@ public final class Folio {
         marks.getStyleClass().add("sl-marks");
         marks.setId("folio-marks");
         add("folio.ledger", new LedgerView(ledger));
-        add("folio.answers", new ClosureView(new ClosureModel(session, live, reading), theme));
+        add("folio.answers", new ClosureView(new ClosureModel(session, live, reading, tasks), theme));
         add("folio.exchange", new ExchangeView(new ExchangeModel(session, live, reading, copies), theme));
         // Before the model, which takes the question away.
         session.asked().addListener((asked, before, after) -> after.ifPresent(row -> open(ORIGIN)));

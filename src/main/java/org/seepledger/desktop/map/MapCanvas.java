@@ -67,7 +67,7 @@ final class MapCanvas extends Region {
             session.lit(),
             session.marked(),
             session.faceFlows(),
-            model.wells(),
+            session.wells(),
             model.overlays().wells()
         };
         for (Observable cause : causes) {

@@ -16,6 +16,7 @@ import javafx.collections.ObservableMap;
 import org.seepledger.desktop.notice.Notices;
 import org.seepledger.job.ShownPicture;
 import org.seepledger.job.TracedNumber;
+import org.seepledger.job.WellPlace;
 import org.seepledger.prism.Prism;
 import org.seepledger.report.CellPlace;
 
@@ -35,6 +36,7 @@ public final class Session {
     private final StringProperty solute = new SimpleStringProperty("");
     private final StringProperty status = new SimpleStringProperty("");
     private final Notices notices = new Notices();
+    private final ObjectProperty<List<WellPlace>> wells = new SimpleObjectProperty<>(List.of());
     private final ObjectProperty<FaceFlows> faceFlows = new SimpleObjectProperty<>(FaceFlows.NONE);
     private final ObjectProperty<Optional<CellPlace>> target = new SimpleObjectProperty<>(Optional.empty());
     private final ObjectProperty<Demand> demand = new SimpleObjectProperty<>(Demand.NONE);
@@ -134,6 +136,11 @@ public final class Session {
     /** {@return what the status line says can be done now} */
     public StringProperty status() {
         return status;
+    }
+
+    /** {@return the wells with their rates in the interval looked at} */
+    public ObjectProperty<List<WellPlace>> wells() {
+        return wells;
     }
 
     /** {@return what flows through the selected prism's faces, for arrows on the map} */
