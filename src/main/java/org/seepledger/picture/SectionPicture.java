@@ -142,9 +142,14 @@ public final class SectionPicture {
         return new Picture(
                 box.right() + RIGHT,
                 shade.isPresent() ? legend.bottom() + 4 : HEIGHT,
-                "Vertical section through " + prism.name(),
+                title(prism),
                 description(),
                 marks);
+    }
+
+    private String title(Prism prism) {
+        return "Vertical section through " + prism.name()
+                + shade.map(by -> ", " + by.words()).orElse("");
     }
 
     private String description() {
