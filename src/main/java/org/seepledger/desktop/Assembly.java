@@ -13,6 +13,7 @@ import org.seepledger.desktop.draw.DraftHand;
 import org.seepledger.desktop.draw.DraftModel;
 import org.seepledger.desktop.draw.Tray;
 import org.seepledger.desktop.folio.Folio;
+import org.seepledger.desktop.folio.Shelf;
 import org.seepledger.desktop.map.GroundModel;
 import org.seepledger.desktop.map.MapModel;
 import org.seepledger.desktop.map.MapView;
@@ -21,6 +22,8 @@ import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.port.Questions;
 import org.seepledger.desktop.port.RecentFolders;
+import org.seepledger.desktop.section.SectionModel;
+import org.seepledger.desktop.section.SectionView;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Opening;
 import org.seepledger.desktop.session.Session;
@@ -46,6 +49,8 @@ final class Assembly {
     private final DraftFiles files;
     private final Tray tray;
     private final MapView mapView;
+    private final SectionModel section;
+    private final Shelf shelf;
     private final ShellView view;
     private final Scene scene;
 
@@ -72,17 +77,21 @@ final class Assembly {
         draft.version().addListener((version, before, after) -> mapView.repaint());
         draft.tool().addListener((tool, before, after) -> mapView.repaint());
         Folio folio = new Folio(session, outside.tasks(), outside.copies(), shell.theme());
+        this.section = new SectionModel(session, outside.tasks());
+        SectionView sectionView = new SectionView(section, shell.theme());
+        this.shelf =
+                new Shelf(List.of(folio.ribbon(), new Shelf.Page("shelf.section", sectionView.bar(), sectionView)));
         Slots slots = new Slots(
-                new WelcomeView(welcome),
-                new ShowingBar(map),
-                mapView,
-                Optional.of(folio.pages()),
-                Optional.of(folio.ribbon()));
+                new WelcomeView(welcome), new ShowingBar(map), mapView, Optional.of(folio.pages()), Optional.of(shelf));
         this.view = new ShellView(shell, slots, actions);
         actions.add(actionsOfWindow());
         actions.add(mapView.actions());
         actions.add(new DraftActions(draft, hand, files, tray, mapView::repaint).all(map));
         actions.add(folio.actions());
+        actions.add(sectionView.actions());
+        actions.add(List.of(new Action("actions.group.section", "action.section.show", "F7", shelf::turn)));
+        session.sectionLine().addListener((line, before, after) -> after.ifPresent(drawn -> shelf.open(1)));
+        view.spreadBelow(shelf.page());
         this.scene = new Scene(view, 1280, 800);
         Dress.put(scene, shell.theme());
         welcome.look(samplePlaces);
@@ -157,6 +166,14 @@ final class Assembly {
 
     DraftModel draft() {
         return draft;
+    }
+
+    SectionModel section() {
+        return section;
+    }
+
+    Shelf shelf() {
+        return shelf;
     }
 
     MapModel map() {

@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Random;
+import java.util.stream.IntStream;
 import net.jqwik.api.ForAll;
 import net.jqwik.api.Property;
 import org.junit.jupiter.api.Test;
@@ -19,28 +20,51 @@ import org.seepledger.prism.Prisms;
 import org.seepledger.prism.Ring;
 import org.seepledger.prism.Shapes;
 import org.seepledger.prism.VerticalRange;
+import org.seepledger.progress.Progress;
+import org.seepledger.sketch.Place;
 
 class SectionPictureTest {
 
     private static final UnitShown RATE = new UnitShown("m3/d", 1, true);
     private static final Prism BOX = Prisms.of("a", 0, 1, Shapes.box(1060, 2050, 1240, 2150));
 
-    private static double inside(Profile profile) {
-        return profile.stretches().stream()
-                .filter(Profile.Stretch::isInPrism)
-                .mapToDouble(stretch -> stretch.to() - stretch.from())
+    private static double inside(Body body) {
+        return body.slabs().stream()
+                .mapToDouble(slab -> slab.to() - slab.from())
                 .sum();
+    }
+
+    private static SectionLine line(double... xy) {
+        return new SectionLine(IntStream.range(0, xy.length / 2)
+                .mapToObj(i -> new Place(xy[2 * i], xy[2 * i + 1]))
+                .toList());
+    }
+
+    private static Profile profile(SectionLine line, Aquifer aquifer) {
+        return Profile.along(line, aquifer, 0, 1, Optional.empty(), Progress.NONE);
+    }
+
+    private static Body body(SectionLine line, Prism prism) {
+        return Body.of(prism, profile(line, Scene.aquifer()));
+    }
+
+    private static Place begin(SectionLine line) {
+        return line.places().get(0);
+    }
+
+    private static Place end(SectionLine line) {
+        return line.places().get(line.places().size() - 1);
     }
 
     @Test
     void theLineFollowsTheLongerSideAndStaysOnTheGrid() {
         SectionLine line = SectionLine.through(BOX, Scene.GRID);
-        assertThat(line.fromX()).isCloseTo(1060 - 0.12 * 180, within(1e-9));
-        assertThat(line.toX()).isCloseTo(1240 + 0.12 * 180, within(1e-9));
-        assertThat(line.fromY()).isCloseTo(line.toY(), within(1e-9)).isBetween(2050.0, 2150.0);
+        assertThat(begin(line).x()).isCloseTo(1060 - 0.12 * 180, within(1e-9));
+        assertThat(end(line).x()).isCloseTo(1240 + 0.12 * 180, within(1e-9));
+        assertThat(begin(line).y()).isCloseTo(end(line).y(), within(1e-9)).isBetween(2050.0, 2150.0);
         SectionLine whole = SectionLine.through(Prisms.of("b", 0, 0, Shapes.box(1000, 2000, 1300, 2200)), Scene.GRID);
-        assertThat(whole.fromX()).isCloseTo(1000, within(1e-9));
-        assertThat(whole.toX()).isCloseTo(1300, within(1e-9));
+        assertThat(begin(whole).x()).isCloseTo(1000, within(1e-9));
+        assertThat(end(whole).x()).isCloseTo(1300, within(1e-9));
     }
 
     @Property(tries = 50)
@@ -48,10 +72,9 @@ class SectionPictureTest {
         double degrees = new Random(seed).nextDouble() * 360;
         double[] turned = Shapes.turned(Shapes.box(1100, 2080, 1200, 2120), degrees, 1150, 2100);
         SectionLine line = SectionLine.through(Prisms.of("a", 0, 0, turned), Scene.GRID);
-        assertThat(line.toX()).isGreaterThanOrEqualTo(line.fromX() - 1e-6);
+        assertThat(end(line).x()).isGreaterThanOrEqualTo(begin(line).x() - 1e-6);
         assertThat(line.length()).isCloseTo(124, within(1e-6));
-        double share = inside(Profile.along(line, Scene.aquifer(), Prisms.of("a", 0, 0, turned)));
-        assertThat(share * line.length()).isCloseTo(100, within(1e-6));
+        assertThat(inside(body(line, Prisms.of("a", 0, 0, turned)))).isCloseTo(100, within(1e-6));
     }
 
     @Test
@@ -63,13 +86,11 @@ class SectionPictureTest {
                 List.of(
                         Prisms.ring(1, 0, Shapes.box(1060, 2050, 1240, 2150)),
                         Prisms.ring(1, 1, Shapes.reversed(Shapes.box(1100, 2070, 1130, 2130)))));
-        SectionLine line = new SectionLine(1000, 2100, 1300, 2100);
-        assertThat(inside(Profile.along(line, Scene.aquifer(), holed))).isCloseTo(150.0 / 300, within(1e-12));
+        assertThat(inside(body(line(1000, 2100, 1300, 2100), holed))).isCloseTo(150, within(1e-9));
     }
 
     @Test
     void theBodyReachesFromLidToLid() {
-        Aquifer aquifer = Scene.aquifer();
         SectionLine line = SectionLine.through(BOX, Scene.GRID);
         List<Ring> rings = BOX.rings();
         Prism lower = new Prism("b", rings, new VerticalRange.Layers(1, 1));
@@ -78,12 +99,8 @@ class SectionPictureTest {
                 rings,
                 new VerticalRange.Elevations(
                         Optional.of(GriddedValues.constant(93)), Optional.of(GriddedValues.constant(60))));
-        assertThat(Profile.along(line, aquifer, lower).stretches())
-                .filteredOn(Profile.Stretch::isInPrism)
-                .allMatch(stretch -> stretch.top() == 90 && stretch.bottom() == 70);
-        assertThat(Profile.along(line, aquifer, between).stretches())
-                .filteredOn(Profile.Stretch::isInPrism)
-                .allMatch(stretch -> stretch.top() == 93 && stretch.bottom() == 70);
+        assertThat(body(line, lower).slabs()).isNotEmpty().allMatch(slab -> slab.top() == 90 && slab.bottom() == 70);
+        assertThat(body(line, between).slabs()).isNotEmpty().allMatch(slab -> slab.top() == 93 && slab.bottom() == 70);
     }
 
     @Test
@@ -95,7 +112,7 @@ class SectionPictureTest {
         Picture section = SectionPicture.of(
                         aquifer,
                         BOX,
-                        new SectionLine(1020, 2100, 1280, 2100),
+                        line(1020, 2100, 1280, 2100),
                         Scene.budget(Map.of("lid:top", 12.5, "lid:bottom", -40.0)),
                         RATE,
                         720)

@@ -32,7 +32,7 @@ public final class Folio {
     private final ToggleGroup chosen = new ToggleGroup();
     private final HBox marks = new HBox();
     private final LedgerModel ledger;
-    private final Node ribbon;
+    private final ChartView ribbon;
 
     /**
      * Builds the panes.
@@ -85,8 +85,8 @@ public final class Folio {
     }
 
     /** {@return the ribbon of time} */
-    public Node ribbon() {
-        return ribbon;
+    public Shelf.Page ribbon() {
+        return new Shelf.Page("shelf.time", ribbon.bar(), ribbon);
     }
 
     /** {@return what can be done here} */

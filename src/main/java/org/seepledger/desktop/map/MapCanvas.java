@@ -67,6 +67,8 @@ final class MapCanvas extends Region {
             session.selected(),
             session.lit(),
             session.faceFlows(),
+            session.sectionLine(),
+            session.along(),
             model.wells(),
             model.overlays().wells()
         };
@@ -168,6 +170,7 @@ final class MapCanvas extends Region {
         MarkPainter painter = new MarkPainter(canvas, theme.getValue());
         painter.paint(Outlines.of(model.session(), camera));
         painter.paint(Lettering.of(model));
+        painter.paint(SectionTrace.of(model.session(), camera));
         guests.forEach(guest -> painter.paint(guest.marks(camera)));
         Aquifer aquifer = model.session().set().get().orElseThrow().aquifer();
         double scale = camera.scale() / aquifer.grid().planUnit();

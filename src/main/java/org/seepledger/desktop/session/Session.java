@@ -1,6 +1,7 @@
 package org.seepledger.desktop.session;
 
 import java.util.Optional;
+import java.util.OptionalDouble;
 import javafx.beans.property.IntegerProperty;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyObjectProperty;
@@ -9,6 +10,8 @@ import javafx.beans.property.SimpleIntegerProperty;
 import javafx.beans.property.SimpleObjectProperty;
 import javafx.beans.property.SimpleStringProperty;
 import javafx.beans.property.StringProperty;
+import org.seepledger.picture.Section;
+import org.seepledger.picture.SectionLine;
 import org.seepledger.prism.Prism;
 import org.seepledger.report.CellPlace;
 
@@ -24,6 +27,10 @@ public final class Session {
     private final StringProperty status = new SimpleStringProperty("");
     private final ObjectProperty<FaceFlows> faceFlows = new SimpleObjectProperty<>(FaceFlows.NONE);
     private final ObjectProperty<Optional<CellPlace>> target = new SimpleObjectProperty<>(Optional.empty());
+    private final ObjectProperty<Optional<Draped>> draped = new SimpleObjectProperty<>(Optional.empty());
+    private final ObjectProperty<Optional<SectionLine>> sectionLine = new SimpleObjectProperty<>(Optional.empty());
+    private final ObjectProperty<Optional<Section>> section = new SimpleObjectProperty<>(Optional.empty());
+    private final ObjectProperty<OptionalDouble> along = new SimpleObjectProperty<>(OptionalDouble.empty());
     private final ObjectProperty<Demand> demand = new SimpleObjectProperty<>(Demand.NONE);
 
     /** What one pane asks of the map. */
@@ -33,7 +40,9 @@ public final class Session {
         /** To show where the selected prism does not close. */
         SHOW_IMBALANCE,
         /** To begin to draw a prism. */
-        DRAW_PRISM
+        DRAW_PRISM,
+        /** To begin to draw the line of a section. */
+        DRAW_SECTION
     }
 
     /**
@@ -43,6 +52,8 @@ public final class Session {
      */
     public void show(Optional<OpenSet> opened) {
         lit.set("");
+        draped.set(Optional.empty());
+        sectionLine.set(Optional.empty());
         faceFlows.set(FaceFlows.NONE);
         selected.set("");
         interval.set(0);
@@ -99,6 +110,26 @@ public final class Session {
     /** {@return the place that a pane asks the map to go to; whoever goes there empties it} */
     public ObjectProperty<Optional<CellPlace>> target() {
         return target;
+    }
+
+    /** {@return what lies over the map, and in which colours} */
+    public ObjectProperty<Optional<Draped>> draped() {
+        return draped;
+    }
+
+    /** {@return the line that the section follows, if one is drawn} */
+    public ObjectProperty<Optional<SectionLine>> sectionLine() {
+        return sectionLine;
+    }
+
+    /** {@return the section as it was last worked out, to be drawn by {@link org.seepledger.picture.SectionPicture}} */
+    public ObjectProperty<Optional<Section>> section() {
+        return section;
+    }
+
+    /** {@return how far along the section's line somebody points, on the map or in the section, in plan units} */
+    public ObjectProperty<OptionalDouble> along() {
+        return along;
     }
 
     /** {@return what a pane asks of the map; whoever meets it sets it back to none} */

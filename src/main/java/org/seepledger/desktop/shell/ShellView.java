@@ -1,8 +1,11 @@
 package org.seepledger.desktop.shell;
 
 import java.util.EnumSet;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Set;
+import javafx.beans.value.ObservableValue;
 import javafx.geometry.Orientation;
 import javafx.scene.Node;
 import javafx.scene.control.Control;
@@ -25,9 +28,15 @@ public final class ShellView extends StackPane {
     private static final Set<KeyCode> WORKING_KEYS =
             EnumSet.of(KeyCode.TAB, KeyCode.ENTER, KeyCode.SPACE, KeyCode.DELETE, KeyCode.BACK_SPACE);
 
+    /** Where the divider between map and ribbon stands, from the top. */
+    private static final double LOW = 0.74;
+
+    private static final double HIGH = 0.6;
+
     private final ShellModel model;
     private final Actions actions;
     private final Slots slots;
+    private final SplitPane down = new SplitPane();
     private final BorderPane work = new BorderPane();
     private final StackPane veil = new StackPane();
     private final ActionsPage actionsPage;
@@ -68,14 +77,27 @@ public final class ShellView extends StackPane {
             across.setDividerPositions(0.6);
             SplitPane.setResizableWithParent(ledger, false);
         });
-        SplitPane down = new SplitPane(across);
+        down.getItems().add(across);
         down.setOrientation(Orientation.VERTICAL);
         slots.ribbon().ifPresent(ribbon -> {
             down.getItems().add(ribbon);
-            down.setDividerPositions(0.74);
+            down.setDividerPositions(LOW);
             SplitPane.setResizableWithParent(ribbon, false);
         });
         return down;
+    }
+
+    /**
+     * Keeps for each page below how high it is; the first begins low, the others higher.
+     *
+     * @param page which page is open
+     */
+    public void spreadBelow(ObservableValue<Number> page) {
+        Map<Number, Double> kept = new HashMap<>(Map.of(0, LOW));
+        page.addListener((open, before, after) -> {
+            kept.put(before, down.getDividerPositions()[0]);
+            down.setDividerPositions(kept.getOrDefault(after, HIGH));
+        });
     }
 
     /** Shows the page of all actions. */
