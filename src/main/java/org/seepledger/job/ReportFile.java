@@ -53,7 +53,9 @@ final class ReportFile {
         for (String name : names) {
             if (!periods.contains(name)) {
                 throw new UsageFault("--report-periods is \"" + name + "\"; give record, worst, all, or the name of a"
-                        + " period as in budget.csv, such as \"" + periods.get(0) + "\".");
+                        + " period as in budget.csv, from \"" + periods.get(0) + "\" to \""
+                        + periods.get(periods.size() - 1)
+                        + "\".");
             }
         }
         return new TableChoice(record, worst, all, names);

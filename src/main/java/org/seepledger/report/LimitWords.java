@@ -116,7 +116,7 @@ final class LimitWords {
                         + " of throughput; a difference smaller than that tells nothing." + against(combined)
                         + (silent.isEmpty()
                                 ? ""
-                                : " Nothing is in it of " + Wording.listed(silent) + ", which state none in percent."));
+                                : " It leaves out what states none in percent: " + Wording.listed(silent) + "."));
     }
 
     /** Terms that rest on the same statement err together: how many sides are drawn must not matter. */
