@@ -77,7 +77,7 @@ final class Assembly {
         draft.version().addListener((version, before, after) -> mapView.repaint());
         draft.tool().addListener((tool, before, after) -> mapView.repaint());
         Folio folio = new Folio(session, outside.tasks(), outside.copies(), shell.theme());
-        this.section = new SectionModel(session, outside.tasks());
+        this.section = new SectionModel(session, outside.tasks(), draft);
         SectionView sectionView = new SectionView(section, shell.theme());
         this.shelf =
                 new Shelf(List.of(folio.ribbon(), new Shelf.Page("shelf.section", sectionView.bar(), sectionView)));

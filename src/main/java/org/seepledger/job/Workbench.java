@@ -187,8 +187,7 @@ public final class Workbench implements AutoCloseable {
     }
 
     private PrismsReader reader(Consumer<String> notes) {
-        int layers = aquifer().layers().size();
-        return new PrismsReader(folder.crs(), aquifer().grid(), layers, true, surfaces, notes, notes);
+        return new PrismsReader(folder.crs(), aquifer().grid(), aquifer().layers(), true, surfaces, notes, notes);
     }
 
     /**

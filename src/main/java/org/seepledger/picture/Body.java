@@ -38,6 +38,35 @@ public record Body(String name, List<Slab> slabs) {
     public record Slab(double from, double to, double top, double bottom) {}
 
     /**
+     * A place on the body.
+     *
+     * @param along how far along the line it is, in length units
+     * @param slab what the body is there
+     */
+    public record Spot(double along, Slab slab) {}
+
+    /**
+     * {@return a place in what is seen of the body, if any of it is}
+     *
+     * @param frame which part of the section is seen
+     * @param share how far from its beginning to its end, from 0 to 1
+     */
+    public Optional<Spot> spot(SectionFrame frame, double share) {
+        List<Slab> seen = slabs.stream()
+                .filter(slab -> slab.to() > frame.from() && slab.from() < frame.to())
+                .toList();
+        if (seen.isEmpty()) {
+            return Optional.empty();
+        }
+        double from = Math.max(seen.get(0).from(), frame.from());
+        double to = Math.min(seen.get(seen.size() - 1).to(), frame.to());
+        double wanted = from + share * (to - from);
+        Slab slab =
+                seen.stream().filter(each -> each.to() >= wanted).findFirst().orElseThrow();
+        return Optional.of(new Spot(Math.max(slab.from(), wanted), slab));
+    }
+
+    /**
      * {@return what a section cuts out of a prism}
      *
      * @param prism the prism

@@ -262,14 +262,15 @@ public final class SectionPicture {
 
     /** The net flow through a lid as an arrow into the body or out of it, in the middle of what is seen of the cut. */
     private void drawLid(Body body, String lid, double net) {
-        Optional<Slab> middle = middle(body, sheet.frame());
+        Optional<Body.Spot> middle = body.spot(sheet.frame(), 0.5);
         if (Double.isNaN(net) && section.light().unit().isEmpty() || middle.isEmpty()) {
             return;
         }
         NetFlow flow = new NetFlow(net);
-        double x = x(middle.get(), sheet.frame());
+        double x = sheet.frame().x(middle.get().along());
         boolean isTop = lid.equals("top");
-        double y = sheet.frame().y(isTop ? middle.get().top() : middle.get().bottom());
+        Slab slab = middle.get().slab();
+        double y = sheet.frame().y(isTop ? slab.top() : slab.bottom());
         if (flow.size() > 0) {
             sheet.over().add(flow.arrow(x, y, 0, isTop ? -LID_REACH : LID_REACH, LID_WIDTH));
             sheet.labels().keepFree(new Box(x - 8, y - LID_REACH - 1, 16, 2 * LID_REACH + 2));
@@ -287,31 +288,13 @@ public final class SectionPicture {
         sheet.labels().place(choices, sheet.over());
     }
 
-    /**
-     * {@return the slab in the middle of what is seen of a body, if any of it is}
-     *
-     * @param body the body
-     * @param frame which part of the section is seen
-     */
-    public static Optional<Slab> middle(Body body, SectionFrame frame) {
-        List<Slab> seen = body.slabs().stream()
-                .filter(slab -> slab.to() > frame.from() && slab.from() < frame.to())
-                .toList();
-        return seen.isEmpty() ? Optional.empty() : Optional.of(seen.get(seen.size() / 2));
-    }
-
-    /** The x of the middle of what is seen of a slab. */
-    static double x(Slab slab, SectionFrame frame) {
-        return (frame.x(Math.max(slab.from(), frame.from())) + frame.x(Math.min(slab.to(), frame.to()))) / 2;
-    }
-
     /** Names a body in it, or above it. */
     private void name(Body body) {
         boolean subject = body.name().equals(section.light().prism());
-        middle(body, sheet.frame()).ifPresent(slab -> {
-            double x = x(slab, sheet.frame());
-            double high = sheet.frame().y(slab.top());
-            double low = sheet.frame().y(slab.bottom());
+        body.spot(sheet.frame(), 0.5).ifPresent(spot -> {
+            double x = sheet.frame().x(spot.along());
+            double high = sheet.frame().y(spot.slab().top());
+            double low = sheet.frame().y(spot.slab().bottom());
             List<Mark.Text> choices = new ArrayList<>();
             for (double y : new double[] {(high + low) / 2 + 4, high + 16, low - 8, high - 6, high - 18}) {
                 Mark.Text text = Mark.Text.of(x, y, body.name(), subject ? 12 : SMALL, Mark.Anchor.MIDDLE)

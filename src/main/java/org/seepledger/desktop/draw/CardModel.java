@@ -5,6 +5,7 @@ import java.util.function.Function;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import org.seepledger.desktop.words.Words;
+import org.seepledger.sketch.Lid;
 import org.seepledger.sketch.Limit;
 import org.seepledger.sketch.Reach;
 import org.seepledger.sketch.Refusal;
@@ -50,18 +51,22 @@ final class CardModel {
         }
         int first = Integer.parseInt(typed.group(1));
         int last = typed.group(2) == null ? first : Integer.parseInt(typed.group(2));
-        int count = model.session()
-                .set()
-                .get()
-                .map(set -> set.aquifer().layers().size())
-                .orElse(1);
+        int count = count();
         if (first < 1 || last < first || last > count) {
             throw new Refusal(Words.of("card.layers.range", count));
         }
         return new Reach.Layers(first - 1, last - 1);
     }
 
-    /** Elevations of top and bottom; nothing for the grid's own. */
+    private int count() {
+        return model.session()
+                .set()
+                .get()
+                .map(set -> set.aquifer().layers().size())
+                .orElse(1);
+    }
+
+    /** Elevations or layers of top and bottom; nothing for the grid's own. */
     void lids(String top, String bottom) {
         if (top.isBlank() && bottom.isBlank()) {
             change(
@@ -77,16 +82,18 @@ final class CardModel {
         if (text.isBlank()) {
             return Optional.empty();
         }
-        try {
-            return Optional.of(
-                    new Limit.Elevation(Double.parseDouble(text.strip().replace('−', '-'))));
-        } catch (NumberFormatException e) {
-            Limit.Surface surface = new Limit.Surface(text.strip());
-            if (!model.knows(surface)) {
-                throw new Refusal(Words.of("card.lid.form"));
+        Optional<Limit> typed = Lid.typed(text);
+        if (typed.isPresent()) {
+            if (typed.get() instanceof Limit.Layer layer && layer.index() >= count()) {
+                throw new Refusal(Words.of("card.layers.range", count()));
             }
-            return Optional.of(surface);
+            return typed;
         }
+        Limit.Surface surface = new Limit.Surface(text.strip());
+        if (!model.knows(surface)) {
+            throw new Refusal(Words.of("card.lid.form"));
+        }
+        return Optional.of(surface);
     }
 
     void reorder(int by) {
@@ -131,9 +138,7 @@ final class CardModel {
                 .filter(Reach.Between.class::isInstance)
                 .map(Reach.Between.class::cast)
                 .flatMap(lid)
-                .map(limit -> limit instanceof Limit.Elevation elevation
-                        ? Double.toString(elevation.height()).replaceFirst("\\.0$", "")
-                        : ((Limit.Surface) limit).path())
+                .map(Lid::text)
                 .orElse("");
     }
 }

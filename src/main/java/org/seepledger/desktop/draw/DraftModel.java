@@ -11,6 +11,7 @@ import javafx.beans.property.ReadOnlyLongWrapper;
 import javafx.beans.property.SimpleObjectProperty;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.GriddedValues;
+import org.seepledger.aquifer.Layer;
 import org.seepledger.desktop.session.Drafting;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.words.Words;
@@ -78,19 +79,24 @@ public final class DraftModel implements Drafting {
     }
 
     private void publish(boolean settled) {
-        int layers =
-                session.set().get().map(set -> set.aquifer().layers().size()).orElse(1);
+        List<Layer> layers =
+                session.set().get().map(set -> set.aquifer().layers()).orElse(List.of());
         session.drawing()
                 .set(new org.seepledger.desktop.session.Drawing(
                         session.drawing().get().revision() + 1,
                         history.current().shapes().stream()
-                                .map(shape -> shape.prism(layers, (surface, lid) -> surfaces.get(surface)))
+                                .map(shape -> shape.prism(
+                                        Math.max(1, layers.size()), (limit, lid) -> surface(layers, limit, lid)))
                                 .toList(),
                         settled));
         if (history.current().find(session.selected().get()).isEmpty()) {
             session.selected().set("");
         }
         version.set(version.get() + 1);
+    }
+
+    private GriddedValues surface(List<Layer> layers, Limit limit, String lid) {
+        return limit instanceof Limit.Layer layer ? layer.among(layers, lid) : surfaces.get(limit);
     }
 
     @Override

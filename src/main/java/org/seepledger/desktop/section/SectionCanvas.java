@@ -8,7 +8,9 @@ import javafx.beans.value.ObservableValue;
 import javafx.scene.AccessibleRole;
 import javafx.scene.canvas.Canvas;
 import javafx.scene.canvas.GraphicsContext;
+import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.Region;
+import org.seepledger.desktop.action.OwnKeys;
 import org.seepledger.desktop.paint.MarkPainter;
 import org.seepledger.desktop.theme.Theme;
 import org.seepledger.picture.Box;
@@ -20,7 +22,7 @@ import org.seepledger.picture.SectionFrame;
 import org.seepledger.picture.SectionPicture;
 
 /** Paints the section, once per frame at most: the picture on one canvas, what follows the cursor on another over it. */
-final class SectionCanvas extends Region {
+final class SectionCanvas extends Region implements OwnKeys {
 
     private final SectionModel model;
     private final ObservableValue<Theme> theme;
@@ -39,6 +41,16 @@ final class SectionCanvas extends Region {
         model.frame().addListener((frame, before, after) -> repaintAll());
         theme.addListener((lit, before, after) -> repaintAll());
         model.session().along().addListener((along, before, after) -> repaint());
+    }
+
+    /** Arrows move the chosen lid, or what is seen; Esc gives a drag up. */
+    @Override
+    public boolean keeps(KeyEvent key) {
+        return switch (key.getCode()) {
+            case UP, DOWN, LEFT, RIGHT -> !key.isShortcutDown() && !key.isAltDown();
+            case ESCAPE -> model.lids().isHolding();
+            default -> false;
+        };
     }
 
     private void repaintAll() {
@@ -80,6 +92,7 @@ final class SectionCanvas extends Region {
 
     private List<Mark> overlay(SectionFrame frame) {
         List<Mark> marks = new ArrayList<>();
+        model.section().get().ifPresent(section -> marks.addAll(LidMarks.of(section, frame, model.lids())));
         Box box = frame.box();
         OptionalDouble along = model.session().along().get();
         if (along.isPresent() && model.section().get().isPresent()) {

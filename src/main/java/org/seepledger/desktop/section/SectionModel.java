@@ -8,6 +8,7 @@ import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.beans.property.ReadOnlyStringProperty;
 import javafx.beans.property.ReadOnlyStringWrapper;
 import org.seepledger.aquifer.Grid;
+import org.seepledger.desktop.session.Drafting;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.task.PaneState;
@@ -35,6 +36,7 @@ public final class SectionModel {
     private final SectionFeed feed;
     private final ReadOnlyObjectWrapper<Optional<SectionFrame>> frame = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final ReadOnlyStringWrapper readout = new ReadOnlyStringWrapper("");
+    private final LidHand lids;
     private double width;
     private double height;
     private boolean fitted = true;
@@ -44,9 +46,11 @@ public final class SectionModel {
      *
      * @param session what the window looks at
      * @param tasks where work is done
+     * @param drafting how prisms are changed
      */
-    public SectionModel(Session session, Tasks tasks) {
+    public SectionModel(Session session, Tasks tasks, Drafting drafting) {
         this.session = session;
+        this.lids = new LidHand(this, drafting);
         session.sectionLine().addListener((line, before, after) -> fitted = true);
         session.section().addListener((section, before, after) -> reframe());
         session.along().addListener((along, before, after) -> point(after));
@@ -63,13 +67,18 @@ public final class SectionModel {
         return feed.state();
     }
 
+    /** {@return what moves the selected prism's top and bottom} */
+    LidHand lids() {
+        return lids;
+    }
+
     /** {@return the section, if there is one} */
     ReadOnlyObjectProperty<Optional<Section>> section() {
         return session.section();
     }
 
     /** {@return which part of the section is seen, and where it comes to} */
-    ReadOnlyObjectProperty<Optional<SectionFrame>> frame() {
+    public ReadOnlyObjectProperty<Optional<SectionFrame>> frame() {
         return frame.getReadOnlyProperty();
     }
 

@@ -1,17 +1,14 @@
 package org.seepledger.desktop.section;
 
 import java.util.List;
+import java.util.Optional;
 import java.util.function.Predicate;
 import javafx.beans.value.ObservableValue;
-import javafx.scene.Cursor;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.control.TextField;
 import javafx.scene.control.Tooltip;
-import javafx.scene.input.MouseButton;
-import javafx.scene.input.MouseEvent;
-import javafx.scene.input.ScrollEvent;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
@@ -22,21 +19,18 @@ import org.seepledger.desktop.pane.StatePane;
 import org.seepledger.desktop.theme.Theme;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.picture.SectionFrame;
+import org.seepledger.sketch.Lid;
 
 /** The pane of the section. */
 public final class SectionView extends BorderPane {
 
     private static final double LEAST_HEIGHT = 236;
-    private static final double NOTCH = 40;
-    private static final double PER_NOTCH = 1.2;
-
     private final SectionModel model;
     private final SectionCanvas canvas;
     private final TextField times = field("section-times", 4);
     private final TextField within = field("section-within", 5);
-    private boolean panning;
-    private double lastX;
-    private double lastY;
+    private final TextField top = field("section-top", 5);
+    private final TextField bottom = field("section-bottom", 5);
 
     /**
      * Builds the pane.
@@ -55,14 +49,11 @@ public final class SectionView extends BorderPane {
         ring.visibleProperty().bind(canvas.focusedProperty());
         setCenter(new StatePane(new StackPane(canvas, ring), model.state())
                 .withAction(Words.of("section.draw"), model::draw));
-        canvas.addEventHandler(MouseEvent.MOUSE_PRESSED, this::onPressed);
-        canvas.addEventHandler(MouseEvent.MOUSE_DRAGGED, this::onDragged);
-        canvas.addEventHandler(MouseEvent.MOUSE_RELEASED, this::onReleased);
-        canvas.addEventHandler(MouseEvent.MOUSE_MOVED, move -> model.point(move.getX(), move.getY()));
-        canvas.addEventHandler(MouseEvent.MOUSE_EXITED, left -> model.leave());
-        canvas.addEventHandler(ScrollEvent.SCROLL, this::onScroll);
-        canvas.setCursor(Cursor.CROSSHAIR);
+        new SectionMouse(model, canvas).begin();
         model.frame().addListener((frame, before, after) -> after.ifPresent(this::show));
+        model.session().drawing().addListener((drawing, before, after) -> showLids());
+        model.session().selected().addListener((selected, before, after) -> showLids());
+        showLids();
         model.section()
                 .addListener(
                         (section, before, after) -> after.ifPresent(shown -> put(within, shorter(shown.within()))));
@@ -79,9 +70,15 @@ public final class SectionView extends BorderPane {
         readout.setMinWidth(0);
         take(times, model::exaggerate);
         take(within, model::showWellsWithin);
+        take(top, text -> model.lids().type(Lid.TOP, text));
+        take(bottom, text -> model.lids().type(Lid.BOTTOM, text));
         HBox bar = new HBox(
                 6,
                 readout,
+                muted("section.top"),
+                top,
+                muted("section.bottom"),
+                bottom,
                 muted("section.times"),
                 times,
                 button("section-fit", "section.fit", "action.section.fit", model::fit),
@@ -148,45 +145,21 @@ public final class SectionView extends BorderPane {
                 .toPlainString();
     }
 
+    private void showLids() {
+        put(top, model.lids().text(Lid.TOP));
+        put(bottom, model.lids().text(Lid.BOTTOM));
+        top.setDisable(model.session().selectedPrism().isEmpty());
+        bottom.setDisable(model.session().selectedPrism().isEmpty());
+    }
+
+    /** Moves the keyboard to where the chosen lid's elevation is typed. */
+    private void focusTyped() {
+        boolean isBottom = model.lids().chosen().equals(Optional.of(Lid.BOTTOM));
+        (isBottom ? bottom : top).requestFocus();
+    }
+
     private void show(SectionFrame frame) {
         put(times, shorter(frame.exaggeration()));
-    }
-
-    private void onPressed(MouseEvent press) {
-        canvas.requestFocus();
-        lastX = press.getX();
-        lastY = press.getY();
-        panning = press.getButton() == MouseButton.PRIMARY || press.getButton() == MouseButton.MIDDLE;
-    }
-
-    private void onDragged(MouseEvent drag) {
-        if (panning) {
-            canvas.setCursor(Cursor.CLOSED_HAND);
-            model.drag(drag.getX() - lastX, drag.getY() - lastY);
-            lastX = drag.getX();
-            lastY = drag.getY();
-        }
-        model.point(drag.getX(), drag.getY());
-    }
-
-    private void onReleased(MouseEvent release) {
-        panning = false;
-        canvas.setCursor(Cursor.CROSSHAIR);
-    }
-
-    /** The wheel goes nearer; with Shift it exaggerates heights, with Ctrl it spreads distances. */
-    private void onScroll(ScrollEvent scroll) {
-        double turned = scroll.getDeltaY() != 0 ? scroll.getDeltaY() : scroll.getDeltaX();
-        if (!scroll.isInertia() && turned != 0) {
-            double factor = Math.pow(PER_NOTCH, turned / NOTCH);
-            model.zoom(
-                    scroll.getX(),
-                    scroll.getY(),
-                    scroll.isShiftDown() ? 1 : factor,
-                    scroll.isShortcutDown() ? 1 : factor);
-            model.point(scroll.getX(), scroll.getY());
-            scroll.consume();
-        }
     }
 
     /** {@return what can be done with the section} */
@@ -200,6 +173,25 @@ public final class SectionView extends BorderPane {
                 new Action(group, "action.section.nearer", "Shift+Equals", () -> model.step(1, 1)),
                 new Action(group, "action.section.farther", "Shift+Minus", () -> model.step(-1, -1)),
                 new Action(group, "action.section.higher", "Shift+Page Up", () -> model.step(0, 1)),
-                new Action(group, "action.section.flatter", "Shift+Page Down", () -> model.step(0, -1)));
+                new Action(group, "action.section.flatter", "Shift+Page Down", () -> model.step(0, -1)),
+                new Action(group, "action.lid.choose", "K", model.lids()::chooseNext),
+                new Action(group, "action.lid.type", "Shift+K", this::focusTyped),
+                new Action(
+                        group, "action.lid.raise", "Alt+Up", () -> model.lids().nudge(1)),
+                new Action(
+                        group,
+                        "action.lid.raise.far",
+                        "Shift+Alt+Up",
+                        () -> model.lids().nudge(10)),
+                new Action(
+                        group,
+                        "action.lid.lower",
+                        "Alt+Down",
+                        () -> model.lids().nudge(-1)),
+                new Action(
+                        group,
+                        "action.lid.lower.far",
+                        "Shift+Alt+Down",
+                        () -> model.lids().nudge(-10)));
     }
 }

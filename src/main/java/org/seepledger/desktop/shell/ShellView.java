@@ -19,6 +19,7 @@ import javafx.scene.layout.StackPane;
 import org.seepledger.desktop.action.Action;
 import org.seepledger.desktop.action.Actions;
 import org.seepledger.desktop.action.ActionsPage;
+import org.seepledger.desktop.action.OwnKeys;
 
 /** The window's frame. */
 public final class ShellView extends StackPane {
@@ -182,6 +183,9 @@ public final class ShellView extends StackPane {
 
     private boolean isKept(KeyEvent key) {
         Node owner = getScene().getFocusOwner();
+        if (owner instanceof OwnKeys own && own.keeps(key)) {
+            return true;
+        }
         if (key.getCode().isFunctionKey()) {
             return false;
         }

@@ -57,7 +57,7 @@ class DrawingFilesTest {
 
     private PrismsReader prisms() {
         SurfaceReader surfaces = (raster, shown) -> GriddedValues.constant(shown.length());
-        return new PrismsReader(UTM, GRID, 4, false, surfaces, notes::add, notes::add);
+        return new PrismsReader(UTM, GRID, FourLayers.ALL, false, surfaces, notes::add, notes::add);
     }
 
     private Drawing read(Path file) {

@@ -36,7 +36,7 @@ class PrismsReaderFaultsTest {
 
     private static void read(Path file, PlanCrs crs, boolean clip) {
         SurfaceReader none = (raster, shown) -> GriddedValues.constant(0);
-        new PrismsReader(crs, GRID, 4, clip, none, warning -> {}, note -> {}).read(file, "p.geojson");
+        new PrismsReader(crs, GRID, FourLayers.ALL, clip, none, warning -> {}, note -> {}).read(file, "p.geojson");
     }
 
     private AbstractThrowableAssert<?, ? extends Throwable> assertRefused(String text, PlanCrs crs, boolean clip)

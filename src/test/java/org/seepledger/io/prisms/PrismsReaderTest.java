@@ -40,7 +40,8 @@ class PrismsReaderTest {
     private List<Prism> read(String text, PlanCrs crs, Grid grid, boolean clip) throws IOException {
         Path file = Files.writeString(folder.resolve("prisms.geojson"), text);
         SurfaceReader surfaces = (raster, shown) -> GriddedValues.constant(shown.length());
-        return new PrismsReader(crs, grid, 4, clip, surfaces, warnings::add, notes::add).read(file, "prisms.geojson");
+        return new PrismsReader(crs, grid, FourLayers.ALL, clip, surfaces, warnings::add, notes::add)
+                .read(file, "prisms.geojson");
     }
 
     private Prism local(String properties, String type, String coordinates) throws IOException {
