@@ -18,9 +18,11 @@ final class SectionKey {
     private static final double ROW = 15;
     private static final double SAMPLE = 22;
     private static final double ABOVE = 36;
+    private static final double BELOW = 5;
+    private static final double GAP = 14;
 
-    /** As wide as an exaggeration is ever written, so that the rows do not depend on it. */
-    private static final double SPARE = 30;
+    /** As wide as an exaggeration is written, so that the rows do not depend on it. */
+    private static final String ANY = "0.0000";
 
     private final Section section;
     private final double width;
@@ -43,7 +45,7 @@ final class SectionKey {
         return new BigDecimal(exaggeration).round(new MathContext(2)).toPlainString();
     }
 
-    private List<Item> items(double exaggeration) {
+    private List<Item> items(String times) {
         List<Item> items = new ArrayList<>();
         boolean levels = section.profile().stretches().stream()
                 .anyMatch(stretch -> Double.isFinite(stretch.column().level()));
@@ -70,8 +72,8 @@ final class SectionKey {
         String flow = section.light().unit();
         items.add(new Item(
                 Optional.empty(),
-                "elevation and distance in " + section.lengthUnit() + ", heights " + times(exaggeration)
-                        + " times exaggerated" + (flow.isEmpty() ? "" : "; flow in " + flow)));
+                "elevation and distance in " + section.lengthUnit() + ", heights " + times + " times exaggerated"
+                        + (flow.isEmpty() ? "" : "; flow in " + flow)));
         return items;
     }
 
@@ -88,16 +90,26 @@ final class SectionKey {
         return false;
     }
 
+    /** Where each item begins: x, and how many rows below the first. */
+    private List<double[]> places() {
+        List<double[]> places = new ArrayList<>();
+        double x = 0;
+        int row = 0;
+        for (Item item : items(ANY)) {
+            if (x > 0 && x + item.width() > width) {
+                x = 0;
+                row++;
+            }
+            places.add(new double[] {x, row});
+            x += item.width() + GAP;
+        }
+        return places;
+    }
+
     /** {@return how much room axis and key take below the section} */
     double height() {
-        int rows = 1;
-        double x = 0;
-        for (Item item : items(1)) {
-            boolean wraps = x > 0 && x + item.width() + SPARE > width;
-            rows += wraps ? 1 : 0;
-            x = (wraps ? 0 : x) + item.width() + 14;
-        }
-        return ABOVE + rows * ROW - 10;
+        List<double[]> places = places();
+        return ABOVE + places.get(places.size() - 1)[1] * ROW + BELOW;
     }
 
     /**
@@ -109,20 +121,16 @@ final class SectionKey {
      */
     List<Mark> marks(double left, double first, double exaggeration) {
         List<Mark> marks = new ArrayList<>();
-        double x = 0;
-        double y = first;
-        for (Item item : items(exaggeration)) {
-            if (x > 0 && x + item.width() + SPARE > width) {
-                x = 0;
-                y += ROW;
-            }
-            double begin = left + x;
-            double base = y;
-            item.sample().ifPresent(sample -> marks.add(moved(sample, begin, base)));
-            double words = begin + (item.sample().isPresent() ? SAMPLE + 5 : 0);
-            marks.add(Mark.Text.of(words, base, item.words(), SMALL, Mark.Anchor.START)
-                    .in(Ink.Token.MUTED));
-            x += item.width() + 14;
+        List<double[]> places = places();
+        List<Item> items = items(times(exaggeration));
+        for (int i = 0; i < items.size(); i++) {
+            Item item = items.get(i);
+            double x = left + places.get(i)[0];
+            double y = first + places.get(i)[1] * ROW;
+            item.sample().ifPresent(sample -> marks.add(moved(sample, x, y)));
+            double words = x + (item.sample().isPresent() ? SAMPLE + 5 : 0);
+            String fitted = Lettering.fitted(item.words(), SMALL, left + width - words);
+            marks.add(Mark.Text.of(words, y, fitted, SMALL, Mark.Anchor.START).in(Ink.Token.MUTED));
         }
         return marks;
     }

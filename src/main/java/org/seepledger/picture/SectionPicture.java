@@ -33,6 +33,11 @@ public final class SectionPicture {
     private static final double LID_REACH = 12;
     private static final double LID_WIDTH = 5;
 
+    /** Where words beside a lid stand, clear of the lid when it is lit up. */
+    private static final double ABOVE_LID = -6;
+
+    private static final double BELOW_LID = 14;
+
     private final Section section;
     private final SectionSheet sheet;
     private final SectionKey key;
@@ -277,7 +282,7 @@ public final class SectionPicture {
         }
         List<Mark.Text> choices = new ArrayList<>();
         for (int side : new int[] {1, -1}) {
-            for (double shift : new double[] {isTop ? -4 : 11, isTop ? 11 : -4}) {
+            for (double shift : new double[] {isTop ? ABOVE_LID : BELOW_LID, isTop ? BELOW_LID : ABOVE_LID}) {
                 Mark.Anchor anchor = side > 0 ? Mark.Anchor.START : Mark.Anchor.END;
                 choices.add(Mark.Text.of(x + 11 * side, y + shift, lid + ": " + flow.words(), SMALL, anchor)
                         .strong()

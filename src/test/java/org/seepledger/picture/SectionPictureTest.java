@@ -125,6 +125,119 @@ class SectionPictureTest {
         assertThat(Scene.texts(section)).extracting(Lettering::box).allMatch(page::holds);
     }
 
+    private static Aquifer withLayers(GriddedValues second, GriddedValues head) {
+        Aquifer scene = Scene.aquifer();
+        return new Aquifer(
+                scene.name(),
+                scene.grid(),
+                List.of(
+                        scene.layers().get(0),
+                        new Layer("clay", Optional.empty(), second, false),
+                        new Layer("gravel", Optional.empty(), GriddedValues.constant(70), false)),
+                scene.times(),
+                scene.flow(),
+                Optional.of(head),
+                scene.storage(),
+                List.of(),
+                scene.lengthUnit(),
+                scene.timeUnit());
+    }
+
+    @Test
+    void aPrismInALayerOfNoThicknessHasAMark() {
+        Aquifer aquifer = withLayers(GriddedValues.constant(90), GriddedValues.constant(95));
+        Profile profile = profile(line(1000, 2100, 1300, 2100), aquifer);
+        Body flat = Body.of(Prisms.of("flat", 1, 1, Shapes.box(1060, 2050, 1240, 2150)), profile);
+        assertThat(inside(flat)).isCloseTo(180, within(1e-9));
+        assertThat(flat.slabs()).allMatch(slab -> slab.top() == 90 && slab.bottom() == 90);
+        Section section = ProfileTest.section(profile, aquifer, List.of(flat));
+        Picture picture = SectionPicture.of(section, 720, 300);
+        SectionFrame frame = SectionFrame.fitting(profile, SectionPicture.box(section, 720, 300));
+        assertThat(Scene.flat(picture.marks())
+                        .filter(Mark.Line.class::isInstance)
+                        .map(Mark.Line.class::cast)
+                        .filter(mark -> mark.stroke().ink() == Ink.Token.PRISM)
+                        .filter(mark -> mark.xy()[0] == frame.x(60)))
+                .singleElement()
+                .satisfies(mark -> assertThat(mark.xy()[1]).isEqualTo(frame.y(90)));
+        assertThat(Scene.texts(picture)).extracting(Mark.Text::words).contains("flat");
+    }
+
+    @Test
+    void aRangeThatMissesTheLayersLeavesNoBody() {
+        Prism above = new Prism(
+                "above",
+                BOX.rings(),
+                new VerticalRange.Elevations(Optional.empty(), Optional.of(GriddedValues.constant(120))));
+        assertThat(body(line(1000, 2100, 1300, 2100), above).slabs()).isEmpty();
+    }
+
+    @Test
+    void valuesAreColouredAndDryCellsDotted() {
+        Aquifer aquifer = withLayers(GriddedValues.constant(80), GriddedValues.constant(85));
+        Profile profile = Profile.along(
+                line(1000, 2100, 1300, 2100),
+                aquifer,
+                0,
+                1,
+                Optional.of((layer, window) -> {
+                    double[] values = new double[window.size()];
+                    java.util.Arrays.fill(values, layer == 1 ? Double.NaN : layer);
+                    return values;
+                }),
+                Progress.NONE);
+        ValueScale scale = new ValueScale(Ramp.DEPTH, 0, 2);
+        Section section = ProfileTest.section(profile, aquifer, List.of())
+                .in(Optional.of(new Section.Colours(scale, "index, m")));
+        SectionFrame frame = SectionFrame.fitting(profile, SectionPicture.box(section, 720, 300));
+        Picture picture = SectionPicture.of(section, frame);
+        Mark.Image image = Scene.flat(picture.marks())
+                .filter(Mark.Image.class::isInstance)
+                .map(Mark.Image.class::cast)
+                .findFirst()
+                .orElseThrow();
+        int column = image.columns() / 2;
+        int[] rows = {
+            (int) (frame.y(95) - frame.box().y()),
+            (int) (frame.y(85) - frame.box().y()),
+            (int) (frame.y(75) - frame.box().y())
+        };
+        assertThat(image.argb()[rows[0] * image.columns() + column]).isEqualTo(scale.argb(0, 1));
+        assertThat(image.argb()[rows[1] * image.columns() + column]).isZero();
+        assertThat(image.argb()[rows[2] * image.columns() + column]).isEqualTo(scale.argb(2, 1));
+        assertThat(Scene.flat(picture.marks())
+                        .filter(Mark.Area.class::isInstance)
+                        .flatMap(mark -> ((Mark.Area) mark).fill().stream()))
+                .anyMatch(fill -> fill.texture() == Mark.Texture.DOTS);
+        assertThat(Scene.texts(picture)).extracting(Mark.Text::words).contains("dry", "colour: index, m");
+    }
+
+    @Test
+    void wellsStandWhereTheyAreNearestToTheLine() {
+        Aquifer aquifer = Scene.aquifer(
+                Scene.well("beside", 1120, 2108, new Screen.InLayer(1)),
+                Scene.well("screened", 1180, 2099, new Screen.Between(94, 80)),
+                Scene.well("far", 1120, 2140, new Screen.InLayer(1)));
+        List<NearbyWell> wells = NearbyWell.of(aquifer, profile(line(1020, 2100, 1280, 2100), aquifer), 10);
+        assertThat(wells)
+                .containsExactly(
+                        new NearbyWell("beside", 100, 8, 100, 90, 70), new NearbyWell("screened", 160, 1, 100, 94, 80));
+    }
+
+    @Property(tries = 30)
+    void wordsStayOnThePage(@ForAll long seed) {
+        Random random = new Random(seed);
+        Aquifer aquifer = Scene.aquifer(Scene.well("a well of a long name", 1120, 2101, new Screen.InLayer(1)));
+        Profile profile = profile(line(1000, 2100, 1150, 2150, 1300, 2010), aquifer);
+        Section section = ProfileTest.section(profile, aquifer, List.of(Body.of(BOX, profile)))
+                .in(new Section.Light("a", "top", 12.5, -40, "m3/d"));
+        double width = 400 + 900 * random.nextDouble();
+        double height = 150 + 300 * random.nextDouble();
+        Picture picture = SectionPicture.of(section, width, height);
+        Box page = new Box(0, 0, width + 0.01, height + 0.01);
+        assertThat(Scene.texts(picture)).extracting(Lettering::box).allMatch(page::holds);
+    }
+
     @Test
     void whereNoLayerLiesThereIsNoSection() {
         GriddedValues none = GriddedValues.constant(Double.NaN);

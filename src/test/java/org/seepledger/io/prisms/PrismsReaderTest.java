@@ -158,6 +158,21 @@ class PrismsReaderTest {
         assertThat(value(open.bottom().orElseThrow())).isEqualTo(-3);
     }
 
+    @Test
+    void aLidMayLieOnALayer() throws IOException {
+        Elevations range = (Elevations) local(
+                        "\"name\": \"A\", \"top\": {\"layer\": 2}, \"bottom\": {\"layer\": 3}",
+                        "Polygon",
+                        "[" + SQUARE + "]")
+                .range();
+        assertThat(value(range.top().orElseThrow())).isEqualTo(30);
+        assertThat(value(range.bottom().orElseThrow())).isEqualTo(10);
+        Elevations mixed = (Elevations)
+                local("\"name\": \"A\", \"top\": {\"layer\": 1}, \"bottom\": 7", "Polygon", "[" + SQUARE + "]")
+                        .range();
+        assertThat(value(mixed.top().orElseThrow())).isEqualTo(40);
+    }
+
     private static double value(GriddedValues surface) {
         double[] values = new double[1];
         surface.read(0, 0, new Window(0, 0, 1, 1), values, 0);
