@@ -14,14 +14,19 @@ import org.seepledger.desktop.draw.DraftModel;
 import org.seepledger.desktop.draw.Tray;
 import org.seepledger.desktop.folio.Folio;
 import org.seepledger.desktop.folio.Shelf;
+import org.seepledger.desktop.handover.HandoverModel;
+import org.seepledger.desktop.handover.HandoverPage;
 import org.seepledger.desktop.map.GroundModel;
 import org.seepledger.desktop.map.MapModel;
 import org.seepledger.desktop.map.MapView;
 import org.seepledger.desktop.map.ShowingBar;
+import org.seepledger.desktop.paint.PicturePng;
 import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.port.FileDialogs;
+import org.seepledger.desktop.port.Opener;
 import org.seepledger.desktop.port.Questions;
 import org.seepledger.desktop.port.RecentFolders;
+import org.seepledger.desktop.running.RunningModel;
 import org.seepledger.desktop.section.SectionModel;
 import org.seepledger.desktop.section.SectionView;
 import org.seepledger.desktop.session.OpenSet;
@@ -48,6 +53,8 @@ final class Assembly {
     private final DraftHand hand;
     private final DraftFiles files;
     private final Tray tray;
+    private final Folio folio;
+    private final RunningModel running;
     private final MapView mapView;
     private final SectionModel section;
     private final Shelf shelf;
@@ -55,7 +62,13 @@ final class Assembly {
     private final Scene scene;
 
     /** What the window asks of the machine. */
-    record Outside(Tasks tasks, FileDialogs dialogs, Questions questions, CopyBoard copies, RecentFolders folders) {}
+    record Outside(
+            Tasks tasks,
+            FileDialogs dialogs,
+            Questions questions,
+            CopyBoard copies,
+            RecentFolders folders,
+            Opener opener) {}
 
     Assembly(Outside outside, List<Path> samplePlaces) {
         this.outside = outside;
@@ -76,22 +89,30 @@ final class Assembly {
                 tray);
         draft.version().addListener((version, before, after) -> mapView.repaint());
         draft.tool().addListener((tool, before, after) -> mapView.repaint());
-        Folio folio = new Folio(session, outside.tasks(), outside.copies(), shell.theme());
+        this.running = new RunningModel(outside.tasks()::running);
+        this.folio = new Folio(session, outside.tasks(), outside.copies(), shell.theme());
         this.section = new SectionModel(session, outside.tasks(), draft);
         SectionView sectionView = new SectionView(section, shell.theme());
         this.shelf =
                 new Shelf(List.of(folio.ribbon(), new Shelf.Page("shelf.section", sectionView.bar(), sectionView)));
         Slots slots = new Slots(
                 new WelcomeView(welcome), new ShowingBar(map), mapView, Optional.of(folio.pages()), Optional.of(shelf));
-        this.view = new ShellView(shell, slots, actions);
+        this.view = new ShellView(shell, slots, actions, running);
         actions.add(actionsOfWindow());
         actions.add(mapView.actions());
         actions.add(new DraftActions(draft, hand, files, tray, mapView::repaint).all(map));
         actions.add(folio.actions());
         actions.add(sectionView.actions());
-        actions.add(List.of(new Action("actions.group.section", "action.section.show", "F7", shelf::turn)));
+        actions.add(List.of(new Action("actions.group.section", "action.section.show", "F12", shelf::turn)));
         session.sectionLine().addListener((line, before, after) -> after.ifPresent(drawn -> shelf.open(1)));
         view.spreadBelow(shelf.page());
+        HandoverModel handover = new HandoverModel(
+                session, outside.tasks(), outside.dialogs(), outside.copies(), outside.opener(), new PicturePng());
+        HandoverPage handoverPage = new HandoverPage(handover, view::lift);
+        actions.add(List.of(new Action("actions.group.file", "action.handover", "Shortcut+E", () -> {
+            view.lower(handoverPage);
+            handoverPage.open();
+        })));
         this.scene = new Scene(view, 1280, 800);
         Dress.put(scene, shell.theme());
         welcome.look(samplePlaces);
@@ -107,16 +128,26 @@ final class Assembly {
                 new Action(window, "action.theme", "F9", shell::switchTheme),
                 new Action(window, "action.pane", "F6", view::nextPane),
                 new Action(window, "action.caution", "Shift+F1", view::showCaution),
+                new Action(window, "action.notices", "F7", view::showNotices),
+                new Action(window, "action.running", "F10", view::showRunning),
+                new Action(window, "action.stop", "Shift+Esc", running::canStop, running::stop),
+                new Action(window, "action.again", "Shortcut+R", this::again),
                 new Action(time, "action.later", "Period", () -> shell.move(1)),
                 new Action(time, "action.earlier", "Comma", () -> shell.move(-1)),
                 new Action(time, "action.deeper", "Page Down", () -> shell.sink(1)),
                 new Action(time, "action.higher", "Page Up", () -> shell.sink(-1)));
     }
 
+    private void again() {
+        folio.again();
+        map.values().again();
+    }
+
     private void show(Opening opening) {
         Optional<OpenSet> before = session.set().get();
         session.show(Optional.of(opening.set()));
-        session.status().set(opened(opening.set().aquifer()));
+        opening.set().workbench().warnings().forEach(session.notices()::warn);
+        session.notices().done(opened(opening.set().aquifer()));
         files.begin(opening);
         mapView.focus();
         before.ifPresent(this::putAway);
@@ -124,7 +155,7 @@ final class Assembly {
 
     private void putAway(OpenSet set) {
         outside.tasks()
-                .each("closing", 1)
+                .each("task.closing", 1)
                 .run(
                         progress -> {
                             set.close();

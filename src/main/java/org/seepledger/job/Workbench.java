@@ -53,12 +53,14 @@ public final class Workbench implements AutoCloseable {
     private final SurfaceRasters surfaces;
     private final KeptCells kept;
     private final Gate gate = new Gate();
+    private final SoluteBench solutes;
 
     private Workbench(AquiferFolder folder) {
         this.folder = folder;
         this.surfaces = new SurfaceRasters(folder.aquifer().grid(), note -> {});
         long memory = Runtime.getRuntime().maxMemory() / 4;
         this.kept = new KeptCells(folder.aquifer(), Math.min(MOST_KEPT_BYTES, memory));
+        this.solutes = new SoluteBench(folder, kept::around, gate, notes -> reader(notes::add));
     }
 
     /**
@@ -105,6 +107,12 @@ public final class Workbench implements AutoCloseable {
      */
     public List<Provenance> origins() {
         return folder.origins();
+    }
+
+    /** {@return whether concentrations of a solute are given, so that its budget can be struck} */
+    public boolean hasSolutes() {
+        return folder.solutes().stream()
+                .anyMatch(solute -> solute.concentration().isPresent());
     }
 
     /**
@@ -181,9 +189,12 @@ public final class Workbench implements AutoCloseable {
      * @throws UsageFault if it cannot be written
      */
     public void write(Path file, Drawing drawing) {
-        Optional<String> named =
-                crs().isLocal() ? Optional.empty() : crs().code().or(() -> Optional.of(crs().wkt()));
-        DrawingWriter.write(file, named, drawing);
+        DrawingWriter.write(file, crs().name(), drawing);
+    }
+
+    /** The set's folder, for what stands beside its description. */
+    DataFolder besides() {
+        return DataFolder.holding(folder.inputs().get(AquiferReader.FILE), AquiferReader.FILE);
     }
 
     private PrismsReader reader(Consumer<String> notes) {
@@ -246,6 +257,11 @@ public final class Workbench implements AutoCloseable {
             notes.addAll(words.remarks(WellRule.POINT));
             return new RecordBudget(prisms, balance, words.warnings(records), notes);
         });
+    }
+
+    /** {@return what answers questions about solutes} */
+    public SoluteBench solutes() {
+        return solutes;
     }
 
     /**
@@ -351,7 +367,7 @@ public final class Workbench implements AutoCloseable {
         });
     }
 
-    private static int threads() {
+    static int threads() {
         return Math.max(1, Runtime.getRuntime().availableProcessors() - 1);
     }
 

@@ -89,6 +89,12 @@ public record Section(
         return new Section(profile, layers, lengthUnit, span, bodies, wells, within, other, light);
     }
 
+    /** The water level in a layer where the water table can lie in it and its head is known; else above all. */
+    double level(Profile.Column column, int layer) {
+        double head = column.heads().length == 0 ? Double.NaN : column.heads()[layer];
+        return layers.get(layer).waterTable() && !Double.isNaN(head) ? head : Double.POSITIVE_INFINITY;
+    }
+
     /** Whether a layer is dry in a column of cells at the end: its head below its bottom, or none for want of water. */
     boolean isDry(Profile.Column column, int layer) {
         double head = column.heads().length == 0 ? Double.NaN : column.heads()[layer];

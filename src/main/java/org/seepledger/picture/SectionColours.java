@@ -3,7 +3,7 @@ package org.seepledger.picture;
 import java.util.Arrays;
 import org.seepledger.picture.Profile.Stretch;
 
-/** Values of a section's cells as pixels, a logical pixel each. */
+/** Values of a section's cells as pixels, a logical pixel each: up to the water level where the water table can lie. */
 final class SectionColours {
 
     private SectionColours() {}
@@ -20,7 +20,8 @@ final class SectionColours {
             double[] surfaces = stretch.column().surfaces();
             for (int layer = 0; layer < values.length && right > left; layer++) {
                 int colour = colours.scale().argb(values[layer], 1);
-                int upper = pixel(frame.y(surfaces[layer]) - box.y(), height);
+                double top = Math.min(surfaces[layer], section.level(stretch.column(), layer));
+                int upper = pixel(frame.y(top) - box.y(), height);
                 int lower = pixel(frame.y(surfaces[layer + 1]) - box.y(), height);
                 for (int row = upper; row < lower && colour != 0; row++) {
                     Arrays.fill(argb, row * width + left, row * width + right, colour);

@@ -25,6 +25,8 @@ public final class SectionPicture {
     private static final double TOP = 22;
     private static final double LEFT = 48;
     private static final double RIGHT = 116;
+    private static final double LEGEND = 360;
+    private static final double GAP = 4;
     private static final double SMALL = SectionSheet.SMALL;
 
     /** Wells are shown up to this share of the line's length beside it, unless somebody says otherwise. */
@@ -49,6 +51,15 @@ public final class SectionPicture {
     }
 
     /**
+     * What cells are coloured by.
+     *
+     * @param values a value of each cell
+     * @param scale which colour a value has
+     * @param words what the values are, with their unit
+     */
+    public record Shade(Profile.LayerValues values, ValueScale scale, String words) {}
+
+    /**
      * {@return a section through a prism with its budget over the record; none where the line meets no layer}
      *
      * @param aquifer the aquifer
@@ -60,8 +71,30 @@ public final class SectionPicture {
      */
     public static Optional<Picture> of(
             Aquifer aquifer, Prism prism, SectionLine line, PeriodBudget budget, UnitShown unit, double width) {
+        return of(aquifer, prism, line, budget, unit, Optional.empty(), width);
+    }
+
+    /**
+     * {@return the section with cells coloured by a value; none where the line meets no layer}
+     *
+     * @param aquifer the aquifer
+     * @param prism the prism
+     * @param line the line
+     * @param budget the prism's budget over the record
+     * @param unit the unit to show
+     * @param shade what cells are coloured by, if by anything
+     * @param width in logical pixels
+     */
+    public static Optional<Picture> of(
+            Aquifer aquifer,
+            Prism prism,
+            SectionLine line,
+            PeriodBudget budget,
+            UnitShown unit,
+            Optional<Shade> shade,
+            double width) {
         int end = aquifer.times().intervals();
-        Profile profile = Profile.along(line, aquifer, 0, end, Optional.empty(), Progress.NONE);
+        Profile profile = Profile.along(line, aquifer, 0, end, shade.map(Shade::values), Progress.NONE);
         double within = nearby(profile);
         boolean moves = aquifer.head().filter(GriddedValues::changes).isPresent();
         Section section = new Section(
@@ -72,25 +105,36 @@ public final class SectionPicture {
                 List.of(Body.of(prism, profile)),
                 NearbyWell.of(aquifer, profile, within),
                 within,
-                Optional.empty(),
+                shade.map(by -> new Section.Colours(by.scale(), by.words())),
                 new Section.Light(
                         prism.name(), "", flow(budget, "top", unit), flow(budget, "bottom", unit), unit.words()));
-        return section.isThere() ? Optional.of(of(section, width, HEIGHT)) : Optional.empty();
+        return section.isThere() ? Optional.of(of(section, width, HEIGHT + legendHeight(section))) : Optional.empty();
     }
 
     /**
-     * {@return a section, all of it}
+     * {@return a section, all of it, with what its colours mean}
      *
      * @param section the section
      * @param width in logical pixels
      * @param height in logical pixels
      */
     public static Picture of(Section section, double width, double height) {
-        return of(section, SectionFrame.fitting(section.profile(), box(section, width, height)));
+        Box box = box(section, width, height - legendHeight(section));
+        Picture bare = of(section, SectionFrame.fitting(section.profile(), box));
+        List<Mark> marks = new ArrayList<>(bare.marks());
+        Box legend = new Box(LEFT, bare.height() + GAP, Math.min(LEGEND, box.width()), RampLegend.LEVEL_HEIGHT);
+        section.colours()
+                .ifPresent(colours -> marks.addAll(RampLegend.level(colours.scale(), 1, colours.words(), legend)));
+        return new Picture(
+                bare.width(), bare.height() + legendHeight(section), bare.title(), bare.description(), marks);
+    }
+
+    private static double legendHeight(Section section) {
+        return section.colours().isPresent() ? RampLegend.LEVEL_HEIGHT + 2 * GAP : 0;
     }
 
     /**
-     * {@return a part of a section}
+     * {@return a part of a section, without what its colours mean}
      *
      * @param section the section
      * @param frame which part, in the box that {@link #box} gives
@@ -128,11 +172,11 @@ public final class SectionPicture {
         sheet.level(section.profile().stretches(), stretch -> stretch.column().level(), SectionKey.AT_END);
         for (Body body : section.bodies()) {
             if (!body.name().equals(section.light().prism())) {
-                sheet.body(body.slabs(), fill(0.4), Optional.of(Stroke.of(Ink.Token.PRISM, 1)));
+                sheet.body(body.slabs(), fill(0.3), Optional.of(Stroke.of(Ink.Token.PRISM, 1)));
             }
         }
         section.body()
-                .ifPresent(body -> sheet.body(body.slabs(), fill(0.75), Optional.of(Stroke.of(Ink.Token.PRISM, 2))));
+                .ifPresent(body -> sheet.body(body.slabs(), fill(0.5), Optional.of(Stroke.of(Ink.Token.PRISM, 2))));
         section.body().ifPresent(this::drawLit);
         section.wells().forEach(this::drawWell);
         section.body().ifPresent(body -> {

@@ -11,6 +11,7 @@ import javafx.scene.input.KeyCode;
 import javafx.stage.Stage;
 import org.seepledger.desktop.port.GivenAnswers;
 import org.seepledger.desktop.task.BackgroundTasks;
+import org.seepledger.desktop.task.Tasks;
 import org.testfx.api.FxRobot;
 import org.testfx.api.FxToolkit;
 import org.testfx.util.WaitForAsyncUtils;
@@ -41,7 +42,7 @@ public final class OpenWindow implements AutoCloseable {
             stage = FxToolkit.registerPrimaryStage();
             FxToolkit.setupFixture(() -> {
                 assembly = new Assembly(
-                        new Assembly.Outside(tasks, answers, answers, answers, answers), List.of(Path.of("")));
+                        new Assembly.Outside(tasks, answers, answers, answers, answers, answers), List.of(Path.of("")));
                 stage.setScene(assembly.scene());
                 stage.setX(0);
                 stage.setY(0);
@@ -72,7 +73,7 @@ public final class OpenWindow implements AutoCloseable {
     }
 
     /** Chooses a value from a choice box, by click and keys. */
-    <T> void choose(String selector, T value) {
+    public <T> void choose(String selector, T value) {
         @SuppressWarnings("unchecked")
         ChoiceBox<T> box = robot.lookup(selector).queryAs(ChoiceBox.class);
         robot.clickOn(box);
@@ -85,13 +86,18 @@ public final class OpenWindow implements AutoCloseable {
     }
 
     /** Lets the window come to rest. */
-    void settle() {
+    public void settle() {
         WaitForAsyncUtils.sleep(350, TimeUnit.MILLISECONDS);
         WaitForAsyncUtils.waitForFxEvents();
     }
 
     Assembly assembly() {
         return assembly;
+    }
+
+    /** {@return where work is done} */
+    Tasks tasks() {
+        return tasks;
     }
 
     Stage stage() {

@@ -92,7 +92,7 @@ class SectionWindowTest {
     }
 
     private void drawLine() {
-        type(KeyCode.L);
+        type(KeyCode.A);
         window.robot.clickOn(onMap(500300, 5201350));
         window.robot.clickOn(onMap(501300, 5201500));
         window.robot.doubleClickOn(onMap(502800, 5200950));

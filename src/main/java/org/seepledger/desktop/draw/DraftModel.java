@@ -13,6 +13,7 @@ import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.GriddedValues;
 import org.seepledger.aquifer.Layer;
 import org.seepledger.desktop.session.Drafting;
+import org.seepledger.desktop.session.DrawnShapes;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.sketch.Drawing;
@@ -89,6 +90,7 @@ public final class DraftModel implements Drafting {
                                         Math.max(1, layers.size()), (limit, lid) -> surface(layers, limit, lid)))
                                 .toList(),
                         settled));
+        tellShapes();
         if (history.current().find(session.selected().get()).isEmpty()) {
             session.selected().set("");
         }
@@ -97,6 +99,10 @@ public final class DraftModel implements Drafting {
 
     private GriddedValues surface(List<Layer> layers, Limit limit, String lid) {
         return limit instanceof Limit.Layer layer ? layer.among(layers, lid) : surfaces.get(limit);
+    }
+
+    private void tellShapes() {
+        session.shapes().set(new DrawnShapes(history.settled(), !isUnsaved()));
     }
 
     @Override
@@ -240,6 +246,7 @@ public final class DraftModel implements Drafting {
      */
     public void kept(Drawing kept) {
         saved = kept;
+        tellShapes();
         version.set(version.get() + 1);
     }
 

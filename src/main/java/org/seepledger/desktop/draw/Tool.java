@@ -19,7 +19,7 @@ public enum Tool {
     /** Makes the selected prism and another one. */
     MERGE("M"),
     /** Draws the line of the section. */
-    SECTION("L");
+    SECTION("A");
 
     private final String keys;
 

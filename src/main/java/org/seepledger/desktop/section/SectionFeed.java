@@ -12,60 +12,61 @@ import org.seepledger.desktop.session.Draped;
 import org.seepledger.desktop.session.FaceFlows;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
-import org.seepledger.desktop.task.EntryGuard;
-import org.seepledger.desktop.task.Lane;
+import org.seepledger.desktop.task.Inquiry;
 import org.seepledger.desktop.task.PaneState;
 import org.seepledger.desktop.task.Tasks;
-import org.seepledger.desktop.words.FaultWords;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.job.MapQuantity;
+import org.seepledger.job.ShownPicture;
 import org.seepledger.picture.Profile;
 import org.seepledger.picture.Section;
 import org.seepledger.picture.SectionLine;
 import org.seepledger.picture.SectionPicture;
 import org.seepledger.prism.Prism;
-import org.seepledger.progress.Cancelled;
 import org.seepledger.progress.Progress;
 import org.seepledger.report.Wording;
 import org.seepledger.unit.Measure;
 
 /**
- * Keeps the section up with its line, the interval, what lies over the map, and the prisms as they are drawn.
- *
- * <p>While a question is being answered, newer ones wait, and only the newest of them is asked next: a hand that never
- * rests would otherwise never see its prism move. The aquifer is read anew only where the line, the interval or the
- * quantity has changed.
+ * Keeps the section up with its line, the interval, what lies over the map, and the prisms as they are drawn. The aquifer
+ * is read anew only where the line, the interval or the quantity has changed.
  */
 final class SectionFeed {
 
+    /** The size of the picture that is handed over, in logical pixels: the measure of a page. */
+    private static final double PAGE_WIDTH = 760;
+
+    private static final double PAGE_HEIGHT = 340;
+
     private final Session session;
-    private final Lane lane;
+    private final Inquiry<Question, Section> inquiry;
     private final ObjectProperty<OptionalDouble> within = new SimpleObjectProperty<>(OptionalDouble.empty());
     private final ReadOnlyObjectWrapper<PaneState> state = new ReadOnlyObjectWrapper<>(nothing());
-    private Optional<Question> asked = Optional.empty();
-    private Optional<Answer> known = Optional.empty();
+    private volatile Optional<Kept> kept = Optional.empty();
 
     /** What the aquifer is read for. */
     private record Ground(OpenSet set, SectionLine line, Optional<MapQuantity> quantity, int interval) {}
 
     private record Question(Ground ground, List<Prism> prisms, OptionalDouble within) {}
 
-    private record Answer(Question question, Section section) {}
+    /** What was last read. */
+    private record Kept(Ground ground, Profile profile) {}
 
     SectionFeed(Session session, Tasks tasks) {
         this.session = session;
-        this.lane = tasks.latest("cutting a section");
+        this.inquiry = new Inquiry<>(tasks.latest("cutting a section"), this::answer);
         for (Observable cause : List.of(
                 session.set(),
                 session.sectionLine(),
                 session.interval(),
                 session.draped(),
                 session.drawing(),
-                session.selected(),
-                session.lit(),
-                session.faceFlows(),
                 within)) {
             cause.addListener(changed -> follow());
+        }
+        for (Observable cause :
+                List.of(inquiry.last(), inquiry.state(), session.selected(), session.lit(), session.faceFlows())) {
+            cause.addListener(changed -> show());
         }
     }
 
@@ -100,90 +101,71 @@ final class SectionFeed {
 
     private void follow() {
         Optional<Question> question = question();
-        if (question.isEmpty()) {
-            lane.cancel();
-            asked = Optional.empty();
-            known = Optional.empty();
-            session.section().set(Optional.empty());
-            state.set(nothing());
-            return;
+        if (question.isPresent()) {
+            inquiry.want(question.get());
+        } else {
+            inquiry.forget(nothing());
+            kept = Optional.empty();
         }
-        if (known.map(Answer::question).equals(question)) {
-            show(known.get());
-        } else if (asked.isEmpty()) {
-            state.set(PaneState.working(Words.of("section.working")));
-            ask(question.get());
-        }
+        show();
     }
 
-    private void ask(Question question) {
-        asked = Optional.of(question);
-        Optional<Profile> kept = known.filter(answer -> answer.question.ground.equals(question.ground))
-                .map(answer -> answer.section.profile());
-        lane.run(progress -> answer(question, kept, progress), this::answered, fault -> notAnswered(question, fault));
-    }
-
-    private static Answer answer(Question question, Optional<Profile> kept, Progress progress) {
-        EntryGuard.enter();
+    private Section answer(Question question, Progress progress) {
         Ground ground = question.ground;
-        Profile profile = kept.orElseGet(
-                () -> ground.set.workbench().profile(ground.line, ground.quantity, ground.interval, progress));
-        double within = question.within.orElse(SectionPicture.nearby(profile));
-        return new Answer(question, ground.set.workbench().section(profile, question.prisms, within, progress));
+        Profile profile = kept.filter(last -> last.ground.equals(ground))
+                .map(Kept::profile)
+                .orElseGet(
+                        () -> ground.set.workbench().profile(ground.line, ground.quantity, ground.interval, progress));
+        kept = Optional.of(new Kept(ground, profile));
+        double distance = question.within.orElse(SectionPicture.nearby(profile));
+        return ground.set.workbench().section(profile, question.prisms, distance, progress);
     }
 
     /** What has come is shown even where something newer is wanted by now: it is nearer to that than what was there. */
-    private void answered(Answer answer) {
-        asked = Optional.empty();
-        known = Optional.of(answer);
-        if (!known.map(Answer::question).equals(question())) {
-            publish(answer);
-        }
-        follow();
+    private void show() {
+        PaneState now = inquiry.state().get();
+        Optional<Inquiry.Reply<Question, Section>> reply =
+                inquiry.last().get().filter(known -> question().isPresent());
+        boolean there = reply.filter(known -> known.answer().isThere()).isPresent();
+        boolean ready = now.phase() == PaneState.Phase.READY;
+        publish(reply.filter(known -> there && now.phase() != PaneState.Phase.FAILED));
+        state.set(question().isEmpty() ? nothing() : ready && !there ? PaneState.empty(Words.of("section.off")) : now);
     }
 
-    /** What cannot be answered is not asked again until something changes. */
-    private void notAnswered(Question question, Throwable fault) {
-        asked = Optional.empty();
-        if (!question().equals(Optional.of(question))) {
-            follow();
-        } else if (!(fault instanceof Cancelled)) {
-            session.section().set(Optional.empty());
-            state.set(PaneState.failed(FaultWords.of(fault)));
-        }
+    private void publish(Optional<Inquiry.Reply<Question, Section>> reply) {
+        Optional<Section> shown =
+                reply.map(known -> known.answer().in(colours(known.question())).in(light()));
+        session.section().set(shown);
+        String name = Words.of("section.picture");
+        shown.ifPresentOrElse(
+                section -> session.pictures()
+                        .put(
+                                name,
+                                new ShownPicture(
+                                        name, progress -> SectionPicture.of(section, PAGE_WIDTH, PAGE_HEIGHT))),
+                () -> session.pictures().remove(name));
     }
 
-    private void show(Answer answer) {
-        if (answer.section.isThere()) {
-            publish(answer);
-            state.set(PaneState.READY);
-        } else {
-            session.section().set(Optional.empty());
-            state.set(PaneState.empty(Words.of("section.off")));
-        }
-    }
-
-    private void publish(Answer answer) {
-        Optional<Section.Colours> colours = session.draped()
+    /** Only while what lies over the map is what the section was read for. */
+    private Optional<Section.Colours> colours(Question question) {
+        return session.draped()
                 .get()
-                .filter(draped -> answer.question.ground.quantity.equals(Optional.of(draped.quantity())))
+                .filter(draped -> question.ground.quantity.equals(Optional.of(draped.quantity())))
                 .map(draped -> new Section.Colours(
                         draped.scale(),
                         Words.of(
                                 "section.colours",
                                 draped.quantity().label(),
                                 draped.quantity().unit())));
-        session.section().set(Optional.of(answer.section.in(colours).in(light())));
     }
 
     private Section.Light light() {
         FaceFlows flows = session.faceFlows().get();
         String selected = session.selected().get();
-        String lit = session.lit().get();
         boolean own = flows.prism().equals(selected) && !selected.isEmpty();
         return new Section.Light(
                 selected,
-                lit,
+                session.lit().get(),
                 own ? flows.lids().getOrDefault("top", Double.NaN) : Double.NaN,
                 own ? flows.lids().getOrDefault("bottom", Double.NaN) : Double.NaN,
                 own ? Wording.raised(Measure.of(flows.unit())) : "");

@@ -166,9 +166,9 @@ public final class SectionView extends BorderPane {
     public List<Action> actions() {
         String group = "actions.group.section";
         return List.of(
-                new Action(group, "action.section.prism", "Shift+L", model::alongPrism),
-                new Action(group, "action.section.turn", "Shortcut+L", model::turn),
-                new Action(group, "action.section.clear", "Shortcut+Shift+L", model::clear),
+                new Action(group, "action.section.prism", "Shift+A", model::alongPrism),
+                new Action(group, "action.section.turn", "Alt+A", model::turn),
+                new Action(group, "action.section.clear", "Shortcut+Shift+A", model::clear),
                 new Action(group, "action.section.fit", "Shift+F5", model::fit),
                 new Action(group, "action.section.nearer", "Shift+Equals", () -> model.step(1, 1)),
                 new Action(group, "action.section.farther", "Shift+Minus", () -> model.step(-1, -1)),

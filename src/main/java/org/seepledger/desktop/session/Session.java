@@ -2,6 +2,7 @@ package org.seepledger.desktop.session;
 
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.TreeMap;
 import javafx.beans.property.IntegerProperty;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyObjectProperty;
@@ -10,6 +11,10 @@ import javafx.beans.property.SimpleIntegerProperty;
 import javafx.beans.property.SimpleObjectProperty;
 import javafx.beans.property.SimpleStringProperty;
 import javafx.beans.property.StringProperty;
+import javafx.collections.FXCollections;
+import javafx.collections.ObservableMap;
+import org.seepledger.desktop.notice.Notices;
+import org.seepledger.job.ShownPicture;
 import org.seepledger.picture.Section;
 import org.seepledger.picture.SectionLine;
 import org.seepledger.prism.Prism;
@@ -20,11 +25,15 @@ public final class Session {
 
     private final ReadOnlyObjectWrapper<Optional<OpenSet>> set = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final ObjectProperty<Drawing> drawing = new SimpleObjectProperty<>(Drawing.NONE);
+    private final ObjectProperty<DrawnShapes> shapes = new SimpleObjectProperty<>(DrawnShapes.NONE);
+    private final ObservableMap<String, ShownPicture> pictures = FXCollections.observableMap(new TreeMap<>());
     private final IntegerProperty interval = new SimpleIntegerProperty();
     private final IntegerProperty layer = new SimpleIntegerProperty();
     private final StringProperty selected = new SimpleStringProperty("");
     private final StringProperty lit = new SimpleStringProperty("");
+    private final StringProperty solute = new SimpleStringProperty("");
     private final StringProperty status = new SimpleStringProperty("");
+    private final Notices notices = new Notices();
     private final ObjectProperty<FaceFlows> faceFlows = new SimpleObjectProperty<>(FaceFlows.NONE);
     private final ObjectProperty<Optional<CellPlace>> target = new SimpleObjectProperty<>(Optional.empty());
     private final ObjectProperty<Optional<Draped>> draped = new SimpleObjectProperty<>(Optional.empty());
@@ -55,6 +64,7 @@ public final class Session {
         draped.set(Optional.empty());
         sectionLine.set(Optional.empty());
         faceFlows.set(FaceFlows.NONE);
+        solute.set("");
         selected.set("");
         interval.set(0);
         layer.set(0);
@@ -70,6 +80,16 @@ public final class Session {
     /** {@return what is drawn} */
     public ObjectProperty<Drawing> drawing() {
         return drawing;
+    }
+
+    /** {@return what is drawn as shapes, for what writes it to a file} */
+    public ObjectProperty<DrawnShapes> shapes() {
+        return shapes;
+    }
+
+    /** {@return the pictures that views offer for handing over, by what they are called there; a view keeps its own up} */
+    public ObservableMap<String, ShownPicture> pictures() {
+        return pictures;
     }
 
     /** {@return the interval looked at, from 0} */
@@ -97,7 +117,17 @@ public final class Session {
         return lit;
     }
 
-    /** {@return what the status line says} */
+    /** {@return what has been done, what to know, what was refused} */
+    public Notices notices() {
+        return notices;
+    }
+
+    /** {@return the name of the solute whose budget is looked at; empty for water's} */
+    public StringProperty solute() {
+        return solute;
+    }
+
+    /** {@return what the status line says can be done now} */
     public StringProperty status() {
         return status;
     }

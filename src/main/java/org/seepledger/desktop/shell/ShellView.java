@@ -20,6 +20,11 @@ import org.seepledger.desktop.action.Action;
 import org.seepledger.desktop.action.Actions;
 import org.seepledger.desktop.action.ActionsPage;
 import org.seepledger.desktop.action.OwnKeys;
+import org.seepledger.desktop.notice.NoticeLine;
+import org.seepledger.desktop.notice.NoticePage;
+import org.seepledger.desktop.running.RunningList;
+import org.seepledger.desktop.running.RunningModel;
+import org.seepledger.desktop.running.RunningStrip;
 
 /** The window's frame. */
 public final class ShellView extends StackPane {
@@ -41,6 +46,8 @@ public final class ShellView extends StackPane {
     private final BorderPane work = new BorderPane();
     private final StackPane veil = new StackPane();
     private final ActionsPage actionsPage;
+    private final NoticePage noticePage;
+    private final RunningList runningList;
     private final CautionPage cautionPage = new CautionPage(this::lift);
 
     /**
@@ -49,15 +56,21 @@ public final class ShellView extends StackPane {
      * @param model which page is shown
      * @param slots what is put into the frame
      * @param actions everything that can be done
+     * @param running what runs beside the window
      */
-    public ShellView(ShellModel model, Slots slots, Actions actions) {
+    public ShellView(ShellModel model, Slots slots, Actions actions, RunningModel running) {
         this.model = model;
         this.slots = slots;
         this.actions = actions;
         this.actionsPage = new ActionsPage(actions, this::lift);
         work.setTop(new Caption(model, slots.showing(), this::showActions));
         work.setCenter(panes());
-        work.setBottom(new Footer(model, this::showCaution));
+        this.noticePage = new NoticePage(model.session().notices(), this::lift);
+        this.runningList = new RunningList(running, this::lift);
+        work.setBottom(new Footer(
+                new NoticeLine(model.session().notices(), model.session().status(), this::showNotices),
+                new RunningStrip(running, this::showRunning),
+                this::showCaution));
         veil.getStyleClass().add("sl-veil");
         veil.setVisible(false);
         veil.setOnMousePressed(press -> {
@@ -113,6 +126,18 @@ public final class ShellView extends StackPane {
         cautionPage.requestFocus();
     }
 
+    /** Shows all notices. */
+    public void showNotices() {
+        lower(noticePage);
+        noticePage.open();
+    }
+
+    /** Shows all that runs beside the window. */
+    public void showRunning() {
+        lower(runningList);
+        runningList.open();
+    }
+
     /** Moves the keyboard to the next pane. */
     public void nextPane() {
         List<Node> panes = slots.panes();
@@ -156,12 +181,18 @@ public final class ShellView extends StackPane {
         return false;
     }
 
-    private void lower(Node page) {
+    /**
+     * Shows a page over all else until it is lifted.
+     *
+     * @param page the page
+     */
+    public void lower(Node page) {
         veil.getChildren().setAll(page);
         veil.setVisible(true);
     }
 
-    private void lift() {
+    /** Puts away what is shown over all else. */
+    public void lift() {
         veil.setVisible(false);
         veil.getChildren().clear();
         focusIn(model.atWelcome().get() ? slots.welcome() : slots.map());
@@ -186,7 +217,7 @@ public final class ShellView extends StackPane {
         if (owner instanceof OwnKeys own && own.keeps(key)) {
             return true;
         }
-        if (key.getCode().isFunctionKey()) {
+        if (key.getCode().isFunctionKey() || key.getCode() == KeyCode.ESCAPE && key.isShiftDown()) {
             return false;
         }
         if (owner instanceof TextInputControl) {
