@@ -3,7 +3,11 @@ package org.seepledger.desktop;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
+import javafx.beans.binding.Bindings;
+import javafx.beans.binding.BooleanBinding;
+import javafx.scene.Node;
 import javafx.scene.Scene;
+import javafx.scene.layout.StackPane;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.desktop.action.Action;
 import org.seepledger.desktop.action.Actions;
@@ -16,6 +20,10 @@ import org.seepledger.desktop.folio.Folio;
 import org.seepledger.desktop.folio.Shelf;
 import org.seepledger.desktop.handover.HandoverModel;
 import org.seepledger.desktop.handover.HandoverPage;
+import org.seepledger.desktop.intake.IntakeModel;
+import org.seepledger.desktop.intake.IntakeView;
+import org.seepledger.desktop.intake.MendModel;
+import org.seepledger.desktop.intake.MendView;
 import org.seepledger.desktop.map.GroundModel;
 import org.seepledger.desktop.map.MapModel;
 import org.seepledger.desktop.map.MapView;
@@ -26,6 +34,7 @@ import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.port.Opener;
 import org.seepledger.desktop.port.Questions;
 import org.seepledger.desktop.port.RecentFolders;
+import org.seepledger.desktop.port.Settings;
 import org.seepledger.desktop.running.RunningModel;
 import org.seepledger.desktop.section.SectionModel;
 import org.seepledger.desktop.section.SectionView;
@@ -48,6 +57,8 @@ final class Assembly {
     private final Session session = new Session();
     private final ShellModel shell = new ShellModel(session);
     private final WelcomeModel welcome;
+    private final IntakeModel intake;
+    private final MendModel mend;
     private final MapModel map;
     private final DraftModel draft;
     private final DraftHand hand;
@@ -68,6 +79,7 @@ final class Assembly {
             Questions questions,
             CopyBoard copies,
             RecentFolders folders,
+            Settings settings,
             Opener opener) {}
 
     Assembly(Outside outside, List<Path> samplePlaces) {
@@ -75,6 +87,10 @@ final class Assembly {
         this.map = new MapModel(session, outside.tasks());
         this.welcome = new WelcomeModel(
                 outside.tasks(), outside.dialogs(), outside.folders(), this::show, go -> files().whenSafe(go));
+        this.intake = new IntakeModel(outside.tasks(), outside.dialogs(), welcome::open);
+        this.mend = new MendModel(outside.tasks(), welcome::open);
+        welcome.whenLoose(this::bring);
+        welcome.whenWrong(mend::mend);
         Actions actions = new Actions();
         this.draft = new DraftModel(session);
         this.hand = new DraftHand(draft);
@@ -90,21 +106,25 @@ final class Assembly {
         draft.version().addListener((version, before, after) -> mapView.repaint());
         draft.tool().addListener((tool, before, after) -> mapView.repaint());
         this.running = new RunningModel(outside.tasks()::running);
-        this.folio = new Folio(session, outside.tasks(), outside.copies(), shell.theme());
+        this.folio = new Folio(session, outside.tasks(), outside.dialogs(), outside.copies(), shell.theme());
         this.section = new SectionModel(session, outside.tasks(), draft);
         SectionView sectionView = new SectionView(section, shell.theme());
         this.shelf =
                 new Shelf(List.of(folio.ribbon(), new Shelf.Page("shelf.section", sectionView.bar(), sectionView)));
-        Slots slots = new Slots(
-                new WelcomeView(welcome), new ShowingBar(map), mapView, Optional.of(folio.pages()), Optional.of(shelf));
-        this.view = new ShellView(shell, slots, actions, running);
+        Slots slots =
+                new Slots(firstPages(), new ShowingBar(map), mapView, Optional.of(folio.pages()), Optional.of(shelf));
+        this.view = new ShellView(shell, slots, actions, running, outside.settings());
         actions.add(actionsOfWindow());
         actions.add(mapView.actions());
         actions.add(new DraftActions(draft, hand, files, tray, mapView::repaint).all(map));
         actions.add(folio.actions());
         actions.add(sectionView.actions());
         actions.add(List.of(new Action("actions.group.section", "action.section.show", "F12", shelf::turn)));
-        session.sectionLine().addListener((line, before, after) -> after.ifPresent(drawn -> shelf.open(1)));
+        session.sectionLine()
+                .addListener((line, before, after) -> after.ifPresent(drawn -> {
+                    shelf.open(1);
+                    view.showBelow();
+                }));
         view.spreadBelow(shelf.page());
         HandoverModel handover = new HandoverModel(
                 session, outside.tasks(), outside.dialogs(), outside.copies(), outside.opener(), new PicturePng());
@@ -124,9 +144,12 @@ final class Assembly {
         return List.of(
                 new Action(window, "action.list", "F1", view::showActions),
                 new Action(window, "action.open", "Shortcut+O", welcome::choose),
+                new Action(window, "action.intake", "Shortcut+Shift+O", this::turnToIntake),
                 new Action(window, "action.welcome", "Shortcut+Home", shell::turnPage),
                 new Action(window, "action.theme", "F9", shell::switchTheme),
                 new Action(window, "action.pane", "F6", view::nextPane),
+                new Action(window, "action.fold.side", "Shift+F6", view::turnSide),
+                new Action(window, "action.fold.below", "Shortcut+F6", view::turnBelow),
                 new Action(window, "action.caution", "Shift+F1", view::showCaution),
                 new Action(window, "action.notices", "F7", view::showNotices),
                 new Action(window, "action.running", "F10", view::showRunning),
@@ -136,6 +159,38 @@ final class Assembly {
                 new Action(time, "action.earlier", "Comma", () -> shell.move(-1)),
                 new Action(time, "action.deeper", "Page Down", () -> shell.sink(1)),
                 new Action(time, "action.higher", "Page Up", () -> shell.sink(-1)));
+    }
+
+    /** One behind the other; what is behind is hidden from the keyboard too. */
+    private Node firstPages() {
+        WelcomeView first = new WelcomeView(welcome);
+        IntakeView loose = new IntakeView(intake, this::leaveIntake);
+        MendView wrong = new MendView(mend);
+        BooleanBinding mending =
+                Bindings.createBooleanBinding(() -> mend.folder().get().isPresent(), mend.folder());
+        first.visibleProperty().bind(intake.shown().or(mending).not());
+        loose.visibleProperty().bind(intake.shown().and(mending.not()));
+        wrong.visibleProperty().bind(mending);
+        return new StackPane(first, loose, wrong);
+    }
+
+    private void turnToIntake() {
+        if (intake.shown().get() && shell.atWelcome().get()) {
+            leaveIntake();
+        } else {
+            bring(List.of());
+        }
+    }
+
+    /** Shows the import assistant, with more files. */
+    private void bring(List<Path> paths) {
+        shell.atWelcome().set(true);
+        intake.bring(paths);
+    }
+
+    private void leaveIntake() {
+        intake.shown().set(false);
+        shell.atWelcome().set(session.set().get().isEmpty());
     }
 
     private void again() {
@@ -213,5 +268,13 @@ final class Assembly {
 
     WelcomeModel welcome() {
         return welcome;
+    }
+
+    MendModel mend() {
+        return mend;
+    }
+
+    IntakeModel intake() {
+        return intake;
     }
 }

@@ -13,8 +13,26 @@ final class TableGuess {
 
     static Item.Table of(LooseFile.Table file) {
         TableLook look = file.look();
-        List<Place> places = Columns.of(look);
-        if (Columns.arePoints(look)) {
+        return of(file, Columns.of(look), Columns.arePoints(look));
+    }
+
+    /** The table with other places; what is made of columns that stay columns of values is kept. */
+    static Item.Table with(Item.Table table, List<Place> places) {
+        boolean placed = places.contains(Place.X) && places.contains(Place.Y);
+        boolean points = placed && (places.contains(Place.RATE) || places.contains(Place.VOLUME));
+        Item.Table fresh = of(table.file(), places, points);
+        List<Use> uses = new ArrayList<>();
+        for (Use use : fresh.uses()) {
+            uses.add(table.uses().stream()
+                    .filter(old -> old.column() == use.column())
+                    .findFirst()
+                    .orElse(use));
+        }
+        return new Item.Table(table.file(), places, uses);
+    }
+
+    private static Item.Table of(LooseFile.Table file, List<Place> places, boolean points) {
+        if (points) {
             return new Item.Table(file, places, List.of(points(file, places)));
         }
         List<Use> uses = new ArrayList<>();

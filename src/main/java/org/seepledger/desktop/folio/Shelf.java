@@ -37,6 +37,7 @@ public final class Shelf extends BorderPane {
     public Shelf(List<Page> pages) {
         this.pages = List.copyOf(pages);
         setId("shelf");
+        getStyleClass().add("sl-pane");
         head.getStyleClass().add("sl-shelf");
         marks.getStyleClass().add("sl-marks");
         for (int i = 0; i < pages.size(); i++) {

@@ -54,7 +54,7 @@ final class SectionFeed {
 
     SectionFeed(Session session, Tasks tasks) {
         this.session = session;
-        this.inquiry = new Inquiry<>(tasks.latest("cutting a section"), this::answer);
+        this.inquiry = new Inquiry<>(tasks.latest("task.section"), this::answer);
         for (Observable cause : List.of(
                 session.set(),
                 session.sectionLine(),

@@ -1,5 +1,6 @@
 package org.seepledger.desktop.session;
 
+import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.TreeMap;
@@ -15,6 +16,7 @@ import javafx.collections.FXCollections;
 import javafx.collections.ObservableMap;
 import org.seepledger.desktop.notice.Notices;
 import org.seepledger.job.ShownPicture;
+import org.seepledger.job.TracedNumber;
 import org.seepledger.picture.Section;
 import org.seepledger.picture.SectionLine;
 import org.seepledger.prism.Prism;
@@ -31,6 +33,8 @@ public final class Session {
     private final IntegerProperty layer = new SimpleIntegerProperty();
     private final StringProperty selected = new SimpleStringProperty("");
     private final StringProperty lit = new SimpleStringProperty("");
+    private final ObjectProperty<List<TracedNumber.Cell>> marked = new SimpleObjectProperty<>(List.of());
+    private final ObjectProperty<Optional<RowAsked>> asked = new SimpleObjectProperty<>(Optional.empty());
     private final StringProperty solute = new SimpleStringProperty("");
     private final StringProperty status = new SimpleStringProperty("");
     private final Notices notices = new Notices();
@@ -63,6 +67,7 @@ public final class Session {
         lit.set("");
         draped.set(Optional.empty());
         sectionLine.set(Optional.empty());
+        marked.set(List.of());
         faceFlows.set(FaceFlows.NONE);
         solute.set("");
         selected.set("");
@@ -115,6 +120,16 @@ public final class Session {
     /** {@return the item of the selected prism's face that is lit up, as {@code side 3}; empty for none} */
     public StringProperty lit() {
         return lit;
+    }
+
+    /** {@return the cells that are lit up, since a number rests on values in them} */
+    public ObjectProperty<List<TracedNumber.Cell>> marked() {
+        return marked;
+    }
+
+    /** {@return the row of the selected prism's budget whose origin is asked for; whoever answers empties it} */
+    public ObjectProperty<Optional<RowAsked>> asked() {
+        return asked;
     }
 
     /** {@return what has been done, what to know, what was refused} */
