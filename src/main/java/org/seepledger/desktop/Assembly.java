@@ -18,6 +18,7 @@ import org.seepledger.desktop.draw.DraftModel;
 import org.seepledger.desktop.draw.LidSurfaces;
 import org.seepledger.desktop.draw.Tray;
 import org.seepledger.desktop.folio.Folio;
+import org.seepledger.desktop.folio.Shelf;
 import org.seepledger.desktop.handover.HandoverModel;
 import org.seepledger.desktop.handover.HandoverPage;
 import org.seepledger.desktop.intake.IntakeModel;
@@ -37,6 +38,8 @@ import org.seepledger.desktop.port.RecentFolders;
 import org.seepledger.desktop.port.Settings;
 import org.seepledger.desktop.running.RunningModel;
 import org.seepledger.desktop.running.RunningStrip;
+import org.seepledger.desktop.section.SectionModel;
+import org.seepledger.desktop.section.SectionView;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Opening;
 import org.seepledger.desktop.session.Session;
@@ -67,6 +70,8 @@ final class Assembly {
     private final Folio folio;
     private final RunningModel running;
     private final MapView mapView;
+    private final SectionModel section;
+    private final Shelf shelf;
     private final ShellView view;
     private final Scene scene;
 
@@ -105,14 +110,26 @@ final class Assembly {
         draft.tool().addListener((tool, before, after) -> mapView.repaint());
         this.running = new RunningModel(outside.tasks()::running);
         this.folio = new Folio(session, outside.tasks(), outside.dialogs(), outside.copies(), shell.theme());
-        Slots slots = new Slots(
-                firstPages(), new ShowingBar(map), mapView, Optional.of(folio.pages()), Optional.of(folio.ribbon()));
+        this.section = new SectionModel(session, outside.tasks(), draft);
+        SectionView sectionView = new SectionView(section, shell.theme());
+        this.shelf =
+                new Shelf(List.of(folio.ribbon(), new Shelf.Page("shelf.section", sectionView.bar(), sectionView)));
+        Slots slots =
+                new Slots(firstPages(), new ShowingBar(map), mapView, Optional.of(folio.pages()), Optional.of(shelf));
         this.view = new ShellView(shell, slots, actions, running, outside.settings());
         FolderDrop.on(view, welcome, over -> session.status().set(over ? Words.of("drop.open") : ""));
         actions.add(actionsOfWindow());
         actions.add(mapView.actions());
         actions.add(new DraftActions(draft, hand, files, tray, mapView::repaint).all(map));
         actions.add(folio.actions());
+        actions.add(sectionView.actions());
+        actions.add(List.of(new Action("actions.group.section", "action.section.show", "F12", shelf::turn)));
+        session.sectionLine()
+                .addListener((line, before, after) -> after.ifPresent(drawn -> {
+                    shelf.open(1);
+                    view.showBelow();
+                }));
+        view.spreadBelow(shelf.page());
         HandoverModel handover = new HandoverModel(
                 session, outside.tasks(), outside.dialogs(), outside.copies(), outside.opener(), new PicturePng());
         HandoverPage handoverPage = new HandoverPage(handover, view::lift);
@@ -243,6 +260,14 @@ final class Assembly {
 
     DraftModel draft() {
         return draft;
+    }
+
+    SectionModel section() {
+        return section;
+    }
+
+    Shelf shelf() {
+        return shelf;
     }
 
     MapModel map() {

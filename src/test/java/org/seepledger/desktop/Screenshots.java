@@ -4,10 +4,14 @@ import java.awt.image.BufferedImage;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.List;
+import java.util.Optional;
 import javafx.scene.image.Image;
 import javafx.scene.image.PixelFormat;
 import javax.imageio.ImageIO;
 import org.seepledger.desktop.theme.Theme;
+import org.seepledger.picture.SectionLine;
+import org.seepledger.sketch.Place;
 
 /** Writes pictures of each view, light and dark, in two sizes, into the folder given. */
 public final class Screenshots {
@@ -35,6 +39,7 @@ public final class Screenshots {
                     window.robot.clickOn("#folio-" + page);
                     both(window, folder, page, suffix);
                 }
+                section(window, folder, suffix);
                 window.robot.interact(() -> {
                     window.assembly().map().showPrism();
                     window.assembly().tray().flipCard();
@@ -49,6 +54,25 @@ public final class Screenshots {
             }
         }
         System.exit(0);
+    }
+
+    private static void section(OpenWindow window, Path folder, String suffix) throws IOException {
+        SectionLine line = new SectionLine(
+                List.of(new Place(500150, 5201350), new Place(501250, 5201500), new Place(502900, 5200950)));
+        window.robot.interact(() -> {
+            window.assembly().session().sectionLine().set(Optional.of(line));
+            window.assembly().session().selected().set("river meadow");
+            window.assembly().session().lit().set("bottom");
+        });
+        window.settle();
+        window.robot.moveTo("#section-canvas");
+        both(window, folder, "section", suffix);
+        window.robot.interact(() -> {
+            window.assembly().session().sectionLine().set(Optional.empty());
+            window.assembly().session().selected().set("well field");
+            window.assembly().shelf().open(0);
+        });
+        window.settle();
     }
 
     private static void both(OpenWindow window, Path folder, String name, String suffix) throws IOException {

@@ -42,7 +42,7 @@ public final class Folio {
     private final LiveBudget live;
     private final Session session;
     private final LedgerModel ledger;
-    private final Node ribbon;
+    private final ChartView ribbon;
 
     /**
      * Builds the panes.
@@ -103,8 +103,8 @@ public final class Folio {
     }
 
     /** {@return the ribbon of time} */
-    public Node ribbon() {
-        return ribbon;
+    public Shelf.Page ribbon() {
+        return new Shelf.Page("shelf.time", ribbon.bar(), ribbon);
     }
 
     /** Works out again what was stopped or failed. */

@@ -68,6 +68,8 @@ final class MapCanvas extends Region {
             session.marked(),
             session.faceFlows(),
             session.wells(),
+            session.sectionLine(),
+            session.along(),
             model.overlays().wells()
         };
         for (Observable cause : causes) {
@@ -167,6 +169,7 @@ final class MapCanvas extends Region {
         painter.paint(Outlines.of(model.session(), camera));
         painter.paint(MarkedCells.of(model.session().marked().get(), aquifer.grid(), camera));
         painter.paint(Lettering.of(model));
+        painter.paint(SectionTrace.of(model.session(), camera));
         guests.forEach(guest -> painter.paint(guest.marks(camera)));
         double scale = camera.scale() / aquifer.grid().planUnit();
         painter.paint(ScaleBar.within(scale, aquifer.lengthUnit().toString(), LONGEST_BAR)

@@ -2,6 +2,7 @@ package org.seepledger.desktop.map;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
@@ -168,6 +169,7 @@ public final class MapModel {
      */
     public void point(double x, double y) {
         Camera seen = camera.get();
+        session.along().set(SectionTrace.along(session.sectionLine().get(), seen, x, y));
         readout.set(session.set()
                 .get()
                 .map(set -> Readout.at(
@@ -181,6 +183,7 @@ public final class MapModel {
     /** The cursor has left. */
     public void leave() {
         readout.set(Optional.empty());
+        session.along().set(OptionalDouble.empty());
     }
 
     /** {@return what the window looks at} */

@@ -4,6 +4,7 @@ import java.util.EnumSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import javafx.beans.value.ObservableValue;
 import javafx.geometry.Orientation;
 import javafx.scene.Node;
 import javafx.scene.control.Control;
@@ -17,6 +18,7 @@ import javafx.scene.layout.StackPane;
 import org.seepledger.desktop.action.Action;
 import org.seepledger.desktop.action.Actions;
 import org.seepledger.desktop.action.ActionsPage;
+import org.seepledger.desktop.action.OwnKeys;
 import org.seepledger.desktop.notice.NoticeLine;
 import org.seepledger.desktop.notice.NoticePage;
 import org.seepledger.desktop.port.Settings;
@@ -37,6 +39,9 @@ public final class ShellView extends StackPane {
 
     /** How high the pane below it is at first. */
     private static final double[] BELOW = {196, 0.22};
+
+    /** How high the section is at first. */
+    private static final double[] SECTION = {290, 0.36};
 
     private final ShellModel model;
     private final Actions actions;
@@ -107,6 +112,24 @@ public final class ShellView extends StackPane {
     /** Folds the pane below the map away, or shows it again. */
     public void turnBelow() {
         below.ifPresent(Fold::turn);
+    }
+
+    /** Shows the pane below the map, if it is folded away. */
+    public void showBelow() {
+        below.ifPresent(Fold::show);
+    }
+
+    /**
+     * Gives the pane below the map a height for each of its pages.
+     *
+     * @param page which page is open: 0 for time, 1 for the section
+     */
+    public void spreadBelow(ObservableValue<Number> page) {
+        page.addListener((open, before, after) -> below.ifPresent(fold -> {
+            double[] size = after.intValue() == 0 ? BELOW : SECTION;
+            fold.show();
+            fold.take(after.intValue() == 0 ? "below.height" : "section.height", size[0], size[1]);
+        }));
     }
 
     /** Shows the page of all actions. */
@@ -210,6 +233,9 @@ public final class ShellView extends StackPane {
 
     private boolean isKept(KeyEvent key) {
         Node owner = getScene().getFocusOwner();
+        if (owner instanceof OwnKeys own && own.keeps(key)) {
+            return true;
+        }
         if (key.getCode().isFunctionKey() || key.getCode() == KeyCode.ESCAPE && key.isShiftDown()) {
             return false;
         }
