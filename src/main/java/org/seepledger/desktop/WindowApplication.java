@@ -6,6 +6,7 @@ import javafx.application.Application;
 import javafx.application.Platform;
 import javafx.stage.Stage;
 import org.seepledger.desktop.platform.PreferredFolders;
+import org.seepledger.desktop.platform.PreferredSettings;
 import org.seepledger.desktop.platform.ScreenCopyBoard;
 import org.seepledger.desktop.platform.ScreenDialogs;
 import org.seepledger.desktop.platform.ScreenQuestions;
@@ -27,13 +28,15 @@ public final class WindowApplication extends Application {
 
     @Override
     public void start(Stage stage) {
+        Preferences kept = Preferences.userRoot().node("org/seepledger/desktop");
         Assembly assembly = new Assembly(
                 new Assembly.Outside(
                         tasks,
                         new ScreenDialogs(stage),
                         new ScreenQuestions(stage),
                         new ScreenCopyBoard(),
-                        new PreferredFolders(Preferences.userRoot().node("org/seepledger/desktop"))),
+                        new PreferredFolders(kept),
+                        new PreferredSettings(kept)),
                 Samples.usualPlaces());
         stage.setTitle(Words.of("program"));
         stage.setMinWidth(LEAST_WIDTH);

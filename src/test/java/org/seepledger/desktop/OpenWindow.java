@@ -42,7 +42,7 @@ public final class OpenWindow implements AutoCloseable {
             stage = FxToolkit.registerPrimaryStage();
             FxToolkit.setupFixture(() -> {
                 assembly = new Assembly(
-                        new Assembly.Outside(tasks, answers, answers, answers, answers), List.of(Path.of("")));
+                        new Assembly.Outside(tasks, answers, answers, answers, answers, answers), List.of(Path.of("")));
                 stage.setScene(assembly.scene());
                 stage.setX(0);
                 stage.setY(0);

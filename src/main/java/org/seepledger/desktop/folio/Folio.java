@@ -31,6 +31,7 @@ public final class Folio {
     private final BorderPane pages = new BorderPane();
     private final ToggleGroup chosen = new ToggleGroup();
     private final HBox marks = new HBox();
+    private final Reading reading;
     private final LiveBudget live;
     private final LedgerModel ledger;
     private final Node ribbon;
@@ -44,7 +45,7 @@ public final class Folio {
      * @param theme light or dark
      */
     public Folio(Session session, Tasks tasks, CopyBoard copies, ObservableValue<Theme> theme) {
-        Reading reading = new Reading(session);
+        this.reading = new Reading(session);
         this.live = new LiveBudget(session, tasks);
         new FaceFeed(session, live, reading).begin();
         this.ledger = new LedgerModel(session, live, reading, copies);
@@ -88,6 +89,11 @@ public final class Folio {
     /** {@return the ribbon of time} */
     public Node ribbon() {
         return ribbon;
+    }
+
+    /** {@return how figures are read} */
+    public Reading reading() {
+        return reading;
     }
 
     /** Works out again what was stopped or failed. */

@@ -20,6 +20,7 @@ import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.task.PaneState;
+import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.ledger.Period;
 import org.seepledger.prism.Prism;
@@ -40,6 +41,7 @@ public final class LedgerModel {
     private final ObjectProperty<Order> order = new SimpleObjectProperty<>(Order.AS_DRAWN);
     private double largest;
     private String whose = "";
+    private String copyTitle = "";
 
     /**
      * Makes the model.
@@ -145,7 +147,7 @@ public final class LedgerModel {
     /** Copies the rows with their units, in full precision. */
     public void copy() {
         if (!rows.isEmpty() && !belongs.get().isEmpty()) {
-            LedgerCopy copy = new LedgerCopy(belongs.get(), unit.get(), rows);
+            LedgerCopy copy = new LedgerCopy(copyTitle, unit.get(), rows);
             copies.table(copy.tabSeparated(), copy.html());
             session.notices().done(Words.of("ledger.copied", belongs.get()));
         }
@@ -158,6 +160,16 @@ public final class LedgerModel {
      */
     public double share(double value) {
         return largest == 0 || Double.isNaN(value) ? 0 : value / largest;
+    }
+
+    /**
+     * {@return a number of a row, as it is to be read}
+     *
+     * @param row the row
+     * @param value the number
+     */
+    public String text(LedgerRow row, double value) {
+        return session.numbers().get().of(row.text(value));
     }
 
     private void show() {
@@ -187,7 +199,8 @@ public final class LedgerModel {
                 .orElse(0);
         rows.setAll(arranged);
         unit.set(reading.unitName(set));
-        whose = shown.whose(set);
+        whose = shown.whose(set, session.numbers().get());
+        copyTitle = shown.whose(set, NumberForm.SPACE_POINT);
         notes.set(String.join(" ", shown.notes()));
     }
 

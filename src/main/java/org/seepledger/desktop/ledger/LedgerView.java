@@ -93,7 +93,7 @@ public final class LedgerView extends BorderPane {
         column.getStyleClass().add("sl-numbers");
         column.setMinWidth(102);
         column.setPrefWidth(102);
-        return shown(column, new NumberCell.Factory(value));
+        return shown(column, new NumberCell.Factory(value, model));
     }
 
     private TableColumn<LedgerRow, LedgerRow> scaleColumn() {

@@ -4,7 +4,6 @@ import java.util.List;
 import java.util.Optional;
 import javafx.beans.value.ObservableValue;
 import javafx.geometry.Pos;
-import javafx.scene.canvas.Canvas;
 import javafx.scene.canvas.GraphicsContext;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
@@ -14,7 +13,9 @@ import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 import org.seepledger.desktop.paint.MarkPainter;
+import org.seepledger.desktop.paint.SharpCanvas;
 import org.seepledger.desktop.theme.Theme;
+import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.job.MapQuantity;
 import org.seepledger.picture.Ink;
@@ -32,7 +33,7 @@ final class Legend extends VBox {
     private final ValuesModel model;
     private final ObservableValue<Theme> theme;
     private final Label title = new Label();
-    private final Canvas bar = new Canvas(WIDTH, BAR + 20);
+    private final SharpCanvas bar = new SharpCanvas(this::show);
     private final TextField from = field("range-from");
     private final TextField to = field("range-to");
 
@@ -42,6 +43,7 @@ final class Legend extends VBox {
         setId("legend");
         getStyleClass().add("sl-float");
         title.getStyleClass().add("sl-strong");
+        bar.size(WIDTH, BAR + 20);
         Region gap = new Region();
         HBox.setHgrow(gap, Priority.ALWAYS);
         Button fit = new Button(Words.of("map.range.fit"));
@@ -63,6 +65,7 @@ final class Legend extends VBox {
         model.scale().addListener((scale, before, after) -> show());
         model.view().addListener((view, before, after) -> show());
         theme.addListener((lit, before, after) -> show());
+        model.numbers().addListener((form, before, after) -> show());
         show();
     }
 
@@ -80,7 +83,7 @@ final class Legend extends VBox {
         if (scale.isEmpty()) {
             return;
         }
-        String[] now = {text(scale.get().from()), text(scale.get().to())};
+        String[] now = {shown(scale.get().from()), shown(scale.get().to())};
         if (from.getText().equals(now[0]) && to.getText().equals(now[1])) {
             return;
         }
@@ -91,7 +94,7 @@ final class Legend extends VBox {
 
     private static double number(String text) {
         try {
-            return Double.parseDouble(text.strip().replace('−', '-').replace(',', '.'));
+            return Double.parseDouble(NumberForm.plain(text));
         } catch (NumberFormatException e) {
             return Double.NaN;
         }
@@ -106,21 +109,25 @@ final class Legend extends VBox {
         return text.length() > 9 ? String.format(java.util.Locale.ROOT, "%.3e", value) : text;
     }
 
+    private String shown(double value) {
+        return model.numbers().get().of(text(value));
+    }
+
     private void show() {
         Optional<ValueScale> scale = model.scale().get();
         setVisible(scale.isPresent() && model.view().get().isPresent());
         if (isVisible()) {
             MapQuantity quantity = model.view().get().orElseThrow().request().quantity();
             title.setText(Words.of("map.legend", quantity.label(), quantity.unit()));
-            from.setText(text(scale.get().from()));
-            to.setText(text(scale.get().to()));
+            from.setText(shown(scale.get().from()));
+            to.setText(shown(scale.get().to()));
             paint(scale.get());
         }
     }
 
     private void paint(ValueScale scale) {
-        GraphicsContext canvas = bar.getGraphicsContext2D();
-        canvas.clearRect(0, 0, bar.getWidth(), bar.getHeight());
+        GraphicsContext canvas = bar.context();
+        canvas.clearRect(0, 0, bar.width(), bar.height());
         MarkPainter painter = new MarkPainter(canvas, theme.getValue());
         double length = WIDTH - 2 * SIDE;
         int[] colours = new int[256];
@@ -135,7 +142,7 @@ final class Legend extends VBox {
             double[] tick = {x, BAR, x, BAR + 4};
             painter.paint(List.of(
                     new Mark.Line(tick, Mark.Stroke.of(Ink.Token.MUTED, 1)),
-                    Mark.Text.of(x, BAR + 16, ticks.label(i), 11, Mark.Anchor.MIDDLE)
+                    Mark.Text.of(x, BAR + 16, model.numbers().get().of(ticks.label(i)), 11, Mark.Anchor.MIDDLE)
                             .in(Ink.Token.MUTED)));
         }
     }

@@ -10,6 +10,7 @@ import javafx.beans.property.SimpleObjectProperty;
 import javafx.beans.property.SimpleStringProperty;
 import javafx.beans.property.StringProperty;
 import org.seepledger.desktop.notice.Notices;
+import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.prism.Prism;
 import org.seepledger.report.CellPlace;
 
@@ -23,6 +24,7 @@ public final class Session {
     private final StringProperty selected = new SimpleStringProperty("");
     private final StringProperty lit = new SimpleStringProperty("");
     private final StringProperty status = new SimpleStringProperty("");
+    private final ObjectProperty<NumberForm> numbers = new SimpleObjectProperty<>(NumberForm.SPACE_POINT);
     private final Notices notices = new Notices();
     private final ObjectProperty<FaceFlows> faceFlows = new SimpleObjectProperty<>(FaceFlows.NONE);
     private final ObjectProperty<Optional<CellPlace>> target = new SimpleObjectProperty<>(Optional.empty());
@@ -86,6 +88,11 @@ public final class Session {
     /** {@return the item of the selected prism's face that is lit up, as {@code side 3}; empty for none} */
     public StringProperty lit() {
         return lit;
+    }
+
+    /** {@return how numbers are written in the window} */
+    public ObjectProperty<NumberForm> numbers() {
+        return numbers;
     }
 
     /** {@return what has been done, what to know, what was refused} */

@@ -18,6 +18,8 @@ import org.seepledger.desktop.action.Actions;
 import org.seepledger.desktop.action.ActionsPage;
 import org.seepledger.desktop.notice.NoticeLine;
 import org.seepledger.desktop.notice.NoticePage;
+import org.seepledger.desktop.preferences.PreferencesModel;
+import org.seepledger.desktop.preferences.PreferencesPage;
 import org.seepledger.desktop.running.RunningList;
 import org.seepledger.desktop.running.RunningModel;
 import org.seepledger.desktop.running.RunningStrip;
@@ -36,6 +38,7 @@ public final class ShellView extends StackPane {
     private final BorderPane work = new BorderPane();
     private final StackPane veil = new StackPane();
     private final ActionsPage actionsPage;
+    private final PreferencesPage preferencesPage;
     private final NoticePage noticePage;
     private final RunningList runningList;
     private final CautionPage cautionPage = new CautionPage(this::lift);
@@ -47,14 +50,17 @@ public final class ShellView extends StackPane {
      * @param slots what is put into the frame
      * @param actions everything that can be done
      * @param running what runs beside the window
+     * @param preferences what users want for good
      */
-    public ShellView(ShellModel model, Slots slots, Actions actions, RunningModel running) {
+    public ShellView(
+            ShellModel model, Slots slots, Actions actions, RunningModel running, PreferencesModel preferences) {
         this.model = model;
         this.slots = slots;
         this.actions = actions;
         this.actionsPage = new ActionsPage(actions, this::lift);
         work.setTop(new Caption(model, slots.showing(), this::showActions));
         work.setCenter(panes());
+        this.preferencesPage = new PreferencesPage(preferences, this::lift);
         this.noticePage = new NoticePage(model.session().notices(), this::lift);
         this.runningList = new RunningList(running, this::lift);
         work.setBottom(new Footer(
@@ -101,6 +107,12 @@ public final class ShellView extends StackPane {
     public void showCaution() {
         lower(cautionPage);
         cautionPage.requestFocus();
+    }
+
+    /** Shows the preferences. */
+    public void showPreferences() {
+        lower(preferencesPage);
+        preferencesPage.open();
     }
 
     /** Shows all notices. */
