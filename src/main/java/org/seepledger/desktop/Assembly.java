@@ -95,7 +95,7 @@ final class Assembly {
         actions.add(mapView.actions());
         actions.add(new DraftActions(draft, hand, files, tray, mapView::repaint).all(map));
         actions.add(folio.actions());
-        Magnifier magnifier = new Magnifier(view);
+        Magnifier magnifier = new Magnifier(view, view.veil());
         this.scene = new Scene(magnifier, 1280, 800);
         Dress.put(scene, shell.theme(), preferences.size());
         session.numbers().bind(preferences.numbers());

@@ -129,9 +129,7 @@ final class Subject implements AutoCloseable {
 
     /** The coordinate system as files name it; empty for local coordinates. */
     Optional<String> crs() {
-        return folder.crs().isLocal()
-                ? Optional.empty()
-                : folder.crs().code().or(() -> Optional.of(folder.crs().wkt()));
+        return folder.crs().name();
     }
 
     /** What a result says of itself: its title, and the files, origins and warnings known by now. */

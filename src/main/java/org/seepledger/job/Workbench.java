@@ -47,12 +47,14 @@ public final class Workbench implements AutoCloseable {
     private final SurfaceRasters surfaces;
     private final KeptCells kept;
     private final Gate gate = new Gate();
+    private final SoluteBench solutes;
 
     private Workbench(AquiferFolder folder) {
         this.folder = folder;
         this.surfaces = new SurfaceRasters(folder.aquifer().grid(), note -> {});
         long memory = Runtime.getRuntime().maxMemory() / 4;
         this.kept = new KeptCells(folder.aquifer(), Math.min(MOST_KEPT_BYTES, memory));
+        this.solutes = new SoluteBench(folder, kept::around, gate, notes -> reader(notes::add));
     }
 
     /**
@@ -175,9 +177,7 @@ public final class Workbench implements AutoCloseable {
      * @throws UsageFault if it cannot be written
      */
     public void write(Path file, Drawing drawing) {
-        Optional<String> named =
-                crs().isLocal() ? Optional.empty() : crs().code().or(() -> Optional.of(crs().wkt()));
-        DrawingWriter.write(file, named, drawing);
+        DrawingWriter.write(file, crs().name(), drawing);
     }
 
     private PrismsReader reader(Consumer<String> notes) {
@@ -243,6 +243,11 @@ public final class Workbench implements AutoCloseable {
         });
     }
 
+    /** {@return what answers questions about solutes} */
+    public SoluteBench solutes() {
+        return solutes;
+    }
+
     /**
      * {@return what a map can show of the set}
      *
@@ -297,7 +302,7 @@ public final class Workbench implements AutoCloseable {
         return WellPlace.of(aquifer(), interval);
     }
 
-    private static int threads() {
+    static int threads() {
         return Math.max(1, Runtime.getRuntime().availableProcessors() - 1);
     }
 

@@ -29,7 +29,9 @@ public sealed interface Ink permits Ink.Token, Ink.Rgb {
         /** The water table and other water levels. */
         WATER,
         /** What is selected or pointed at. */
-        ACCENT
+        ACCENT,
+        /** A plume's outline, and the track of its centre. */
+        PLUME
     }
 
     /**

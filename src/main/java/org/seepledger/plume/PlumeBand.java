@@ -19,30 +19,29 @@ import org.seepledger.aquifer.Well;
 import org.seepledger.aquifer.WellRate;
 import org.seepledger.aquifer.Window;
 import org.seepledger.balance.PrismWalk;
+import org.seepledger.balance.Span;
 import org.seepledger.progress.Progress;
 
 /** One band of rows, worked through all intervals for all solutes. */
 final class PlumeBand {
 
-    private final Aquifer aquifer;
+    private final SoluteBalance.Scope scope;
     private final Window window;
     private final List<Solute> solutes;
     private final List<PrismWalk> walks;
     private final List<List<SoluteChart>> charts;
     private final List<PlacedWell> wells;
-    private final SoluteBalance.Options options;
     private final List<Integer> terms = new ArrayList<>();
     private final Map<Well, Integer> sourceOfWell = new IdentityHashMap<>();
 
     PlumeBand(
-            Aquifer aquifer,
+            SoluteBalance.Scope scope,
             Window window,
             List<Solute> solutes,
             List<PrismWalk> walks,
             List<List<SoluteChart>> charts,
-            List<PlacedWell> wells,
-            SoluteBalance.Options options) {
-        this.aquifer = aquifer;
+            List<PlacedWell> wells) {
+        this.scope = scope;
         this.window = window;
         this.solutes = solutes;
         this.walks = walks;
@@ -50,7 +49,7 @@ final class PlumeBand {
         this.wells = wells.stream()
                 .filter(well -> window.contains(well.row(), well.column()))
                 .toList();
-        this.options = options;
+        Aquifer aquifer = scope.aquifer();
         for (int i = 0; i < aquifer.sources().size(); i++) {
             if (aquifer.sources().get(i) instanceof Source.Points points) {
                 for (Well well : points.wells()) {
@@ -63,16 +62,16 @@ final class PlumeBand {
     }
 
     PlumeSums work(Progress progress) {
-        CellGeometry geometry = aquifer.geometry(window);
-        int intervals = aquifer.times().intervals();
-        PlumeSums sums = new PlumeSums(walks, charts, intervals);
+        CellGeometry geometry = scope.known().geometry(window);
+        Span span = scope.span();
+        PlumeSums sums = new PlumeSums(walks, charts, span);
         List<PrismWalk.OverBand> overBand =
                 walks.stream().map(walk -> walk.over(geometry)).toList();
         List<Matrix> matrices =
                 solutes.stream().map(solute -> Matrix.of(solute, geometry)).toList();
-        List<Reading> before = readings(0, geometry);
-        for (int interval = 0; interval < intervals; interval++) {
-            IntervalState state = aquifer.state(interval, geometry, wells);
+        List<Reading> before = readings(span.from(), geometry);
+        for (int interval = span.from(); interval < span.to(); interval++) {
+            IntervalState state = scope.known().state(interval, geometry, wells);
             List<Reading> after = readings(interval + 1, geometry);
             List<SoluteState> states = states(interval, state, matrices, before, after);
             for (int solute = 0; solute < solutes.size(); solute++) {
@@ -146,17 +145,17 @@ final class PlumeBand {
             int solute,
             SoluteState known,
             PlumeSums sums) {
-        Optional<DispersiveFaces> spreading = options.dispersion()
+        Optional<DispersiveFaces> spreading = scope.options().dispersion()
                 ? known.matrix().solute().dispersion().map(given -> new DispersiveFaces(state, known.matrix(), given))
                 : Optional.empty();
-        double length = aquifer.times().length(interval);
+        double length = scope.aquifer().times().length(interval);
         for (int prism = 0; prism < walks.size(); prism++) {
             SoluteTally tally = sums.tally(interval, prism, solute);
             SoluteChart chart = charts.get(prism).get(solute);
             SoluteBookings.Counting counting = new SoluteBookings.Counting(
                     walks.get(prism).firstLayer(),
-                    interval == 0,
-                    options.above().orElse(Double.POSITIVE_INFINITY));
+                    interval == scope.span().from(),
+                    scope.options().above().orElse(Double.POSITIVE_INFINITY));
             SoluteBookings bookings = new SoluteBookings(chart, state, known, tally, length, counting);
             overBand.get(prism).book(state, bookings);
             bookings.finish();

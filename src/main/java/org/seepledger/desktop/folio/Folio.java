@@ -21,6 +21,9 @@ import org.seepledger.desktop.ledger.LedgerModel;
 import org.seepledger.desktop.ledger.LedgerView;
 import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.session.Session;
+import org.seepledger.desktop.solute.LivePlume;
+import org.seepledger.desktop.solute.MassReading;
+import org.seepledger.desktop.solute.SoluteLook;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.theme.Theme;
 import org.seepledger.desktop.words.Words;
@@ -33,6 +36,7 @@ public final class Folio {
     private final HBox marks = new HBox();
     private final Reading reading;
     private final LiveBudget live;
+    private final Session session;
     private final LedgerModel ledger;
     private final Node ribbon;
 
@@ -45,10 +49,13 @@ public final class Folio {
      * @param theme light or dark
      */
     public Folio(Session session, Tasks tasks, CopyBoard copies, ObservableValue<Theme> theme) {
+        this.session = session;
         this.reading = new Reading(session);
         this.live = new LiveBudget(session, tasks);
         new FaceFeed(session, live, reading).begin();
-        this.ledger = new LedgerModel(session, live, reading, copies);
+        SoluteLook look = new SoluteLook(session);
+        LivePlume plumes = new LivePlume(session, look, tasks);
+        this.ledger = new LedgerModel(session, live, reading, plumes, new MassReading(session, reading), copies);
         pages.setId("folio");
         pages.getStyleClass().add("sl-folio");
         marks.getStyleClass().add("sl-marks");
@@ -56,6 +63,7 @@ public final class Folio {
         add("folio.ledger", new LedgerView(ledger));
         add("folio.answers", new ClosureView(new ClosureModel(session, live, reading), theme));
         add("folio.exchange", new ExchangeView(new ExchangeModel(session, live, reading, copies), theme));
+        marks.getChildren().add(new SubjectBox(session));
         pages.setTop(marks);
         chosen.selectToggle(chosen.getToggles().get(0));
         this.ribbon = new ChartView(new ChartModel(session, live, reading), theme);
@@ -108,6 +116,7 @@ public final class Folio {
                 new Action(group, "action.page.ledger", "Shortcut+1", () -> open(0)),
                 new Action(group, "action.page.answers", "Shortcut+2", () -> open(1)),
                 new Action(group, "action.page.exchange", "Shortcut+3", () -> open(2)),
+                new Action(group, "action.subject", "Shortcut+Shift+U", () -> SubjectBox.next(session)),
                 new Action(group, "action.ledger.copy", "Shortcut+Shift+C", ledger::copy),
                 new Action(
                         group,

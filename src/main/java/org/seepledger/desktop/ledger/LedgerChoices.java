@@ -25,13 +25,17 @@ import org.seepledger.unit.Measure;
 final class LedgerChoices extends VBox {
 
     private final Reading reading;
+    private final LedgerSheets sheets;
     private final ChoiceBox<String> units = new ChoiceBox<>();
     private boolean filling;
 
     LedgerChoices(LedgerModel model) {
         this.reading = model.reading();
+        this.sheets = model.sheets();
         getStyleClass().add("sl-choices");
         Label belongs = line("ledger-belongs", model.belongs(), "sl-belongs");
+        Label closure = line("ledger-closure", model.closure(), "sl-small");
+        closure.managedProperty().bind(closure.textProperty().isNotEmpty());
         Label notes = line("ledger-notes", model.notes(), "sl-small", "sl-warning");
         notes.managedProperty().bind(notes.textProperty().isNotEmpty());
         FlowPane choices = new FlowPane(
@@ -39,16 +43,17 @@ final class LedgerChoices extends VBox {
                 6,
                 periods(),
                 months(),
-                box("ledger-amounts", List.of(false, true), LedgerChoices::amounts, reading.volumes()),
+                amounts(model),
                 units,
                 box("ledger-arrangement", List.of(Arrangement.values()), LedgerChoices::arranged, model.arrangement()),
                 copy(model));
-        getChildren().addAll(belongs, notes, choices);
+        getChildren().addAll(belongs, closure, notes, choices);
         units.setId("ledger-unit");
         units.setMinWidth(96);
         units.setConverter(converter(LedgerChoices::unit));
         units.setOnAction(chosen -> take());
         reading.changes().addListener((changes, before, after) -> fill());
+        model.solute().addListener((solute, before, after) -> fill());
         fill();
     }
 
@@ -97,8 +102,20 @@ final class LedgerChoices extends VBox {
         return Wording.raised(Measure.of(unit));
     }
 
-    private static String amounts(boolean volumes) {
-        return Words.of(volumes ? "ledger.volumes" : "ledger.rates");
+    /** Rates, or what went through in all: volumes of water, masses of a solute. */
+    private ChoiceBox<Boolean> amounts(LedgerModel model) {
+        ChoiceBox<Boolean> box = box("ledger-amounts", List.of(false, true), this::amounts, reading.volumes());
+        model.solute().addListener((solute, before, after) -> {
+            if (before.isEmpty() != after.isEmpty()) {
+                box.getItems().setAll(false, true);
+                box.setValue(reading.volumes().get());
+            }
+        });
+        return box;
+    }
+
+    private String amounts(boolean all) {
+        return Words.of(!all ? "ledger.rates" : sheets.ofSolute() ? "ledger.masses" : "ledger.volumes");
     }
 
     private static String arranged(Arrangement arrangement) {
@@ -143,8 +160,8 @@ final class LedgerChoices extends VBox {
 
     private void fill() {
         filling = true;
-        units.getItems().setAll(reading.units());
-        String unit = reading.unit().get();
+        units.getItems().setAll(sheets.units());
+        String unit = sheets.unit().get();
         units.setValue(
                 unit.isEmpty() && !units.getItems().isEmpty() ? units.getItems().get(0) : unit);
         filling = false;
@@ -152,7 +169,7 @@ final class LedgerChoices extends VBox {
 
     private void take() {
         if (!filling && units.getValue() != null) {
-            reading.unit().set(units.getValue());
+            sheets.unit().set(units.getValue());
         }
     }
 }

@@ -7,6 +7,7 @@ import javafx.scene.control.Label;
 import javafx.scene.control.TableColumn;
 import javafx.scene.control.TableRow;
 import javafx.scene.control.TableView;
+import javafx.scene.control.Tooltip;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyCodeCombination;
 import javafx.scene.input.KeyCombination;
@@ -19,6 +20,7 @@ public final class LedgerView extends BorderPane {
 
     private static final KeyCombination COPY = new KeyCodeCombination(KeyCode.C, KeyCombination.SHORTCUT_DOWN);
     private static final PseudoClass HEADING = PseudoClass.getPseudoClass("heading");
+    private static final double BRACKET = 84;
     private static final PseudoClass TOTAL = PseudoClass.getPseudoClass("total");
 
     private final LedgerModel model;
@@ -48,6 +50,8 @@ public final class LedgerView extends BorderPane {
         table.getColumns().add(numbers("ledger.in", Order.LARGEST_IN, LedgerRow::inflow));
         table.getColumns().add(numbers("ledger.out", Order.LARGEST_OUT, LedgerRow::outflow));
         table.getColumns().add(numbers("ledger.net", Order.LARGEST_NET, LedgerRow::net));
+        table.getColumns().add(bracket("ledger.zero", "ledger.zero.tip", LedgerRow::low));
+        table.getColumns().add(bracket("ledger.limit", "ledger.limit.tip", LedgerRow::high));
         table.getColumns().add(scaleColumn());
         table.setRowFactory(made -> new KindRow());
         table.getSelectionModel().selectedItemProperty().addListener((row, before, after) -> {
@@ -93,6 +97,20 @@ public final class LedgerView extends BorderPane {
         column.getStyleClass().add("sl-numbers");
         column.setMinWidth(102);
         column.setPrefWidth(102);
+        return shown(column, new NumberCell.Factory(value, model));
+    }
+
+    /** The net with non-detects as something else; of solutes alone. */
+    private TableColumn<LedgerRow, LedgerRow> bracket(String words, String tip, NumberCell.Value value) {
+        TableColumn<LedgerRow, LedgerRow> column = new TableColumn<>();
+        Label header = new Label(Words.of(words));
+        header.getStyleClass().add("sl-small");
+        header.setTooltip(new Tooltip(Words.of(tip)));
+        column.setGraphic(header);
+        column.getStyleClass().add("sl-numbers");
+        column.setMinWidth(BRACKET);
+        column.setPrefWidth(BRACKET);
+        column.visibleProperty().bind(model.solute().isNotEmpty());
         return shown(column, new NumberCell.Factory(value, model));
     }
 

@@ -127,7 +127,7 @@ final class Legend extends VBox {
 
     private void paint(ValueScale scale) {
         GraphicsContext canvas = bar.context();
-        canvas.clearRect(0, 0, bar.width(), bar.height());
+        canvas.clearRect(0, 0, bar.getWidth(), bar.getHeight());
         MarkPainter painter = new MarkPainter(canvas, theme.getValue());
         double length = WIDTH - 2 * SIDE;
         int[] colours = new int[256];

@@ -97,7 +97,7 @@ final class MapCanvas extends Region {
     protected void layoutChildren() {
         double width = Math.floor(getWidth());
         double height = Math.floor(getHeight());
-        if (width != ground.width() || height != ground.height()) {
+        if (width != ground.getWidth() || height != ground.getHeight()) {
             ground.size(width, height);
             above.size(width, height);
             model.resize(width, height);
@@ -120,9 +120,9 @@ final class MapCanvas extends Region {
     private void paintGround() {
         GraphicsContext canvas = ground.context();
         canvas.setFill(Paints.of(Ink.Token.PAPER, 1, theme.getValue()));
-        canvas.fillRect(0, 0, ground.width(), ground.height());
+        canvas.fillRect(0, 0, ground.getWidth(), ground.getHeight());
         canvas.setFill(Paints.of(Ink.Token.GUIDE, 0.35, theme.getValue()));
-        canvas.fillRect(0, 0, ground.width(), ground.height());
+        canvas.fillRect(0, 0, ground.getWidth(), ground.getHeight());
         if (model.session().set().get().isEmpty()) {
             return;
         }
@@ -159,7 +159,7 @@ final class MapCanvas extends Region {
 
     private void paintAbove() {
         GraphicsContext canvas = above.context();
-        canvas.clearRect(0, 0, above.width(), above.height());
+        canvas.clearRect(0, 0, above.getWidth(), above.getHeight());
         if (model.session().set().get().isEmpty()) {
             return;
         }

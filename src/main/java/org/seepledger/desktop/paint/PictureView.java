@@ -81,7 +81,7 @@ public final class PictureView extends Region {
     }
 
     private void clear() {
-        canvas.context().clearRect(0, 0, canvas.width(), canvas.height());
+        canvas.context().clearRect(0, 0, canvas.getWidth(), canvas.getHeight());
         setAccessibleText("");
     }
 }

@@ -1,18 +1,16 @@
 package org.seepledger.desktop.paint;
 
-import javafx.scene.Parent;
 import javafx.scene.canvas.Canvas;
 import javafx.scene.canvas.GraphicsContext;
+import javafx.scene.layout.Region;
 import javafx.scene.transform.Scale;
 
 /** A canvas that has as many pixels as it shows when the window is enlarged, so that letters on it stay sharp. */
-public final class SharpCanvas extends Parent {
+public final class SharpCanvas extends Region {
 
     private final Canvas canvas = new Canvas();
     private final Scale back = new Scale(1, 1);
     private double sharpness = 1;
-    private double width;
-    private double height;
 
     /**
      * Makes a canvas without size.
@@ -20,12 +18,13 @@ public final class SharpCanvas extends Parent {
      * @param changed told when the window is enlarged or reduced, and the canvas must be painted anew
      */
     public SharpCanvas(Runnable changed) {
+        canvas.setManaged(false);
         canvas.getTransforms().add(back);
         getChildren().add(canvas);
         localToSceneTransformProperty().addListener((transform, before, after) -> {
             if (after.getMxx() != sharpness && after.getMxx() > 0) {
                 sharpness = after.getMxx();
-                resize();
+                fit();
                 changed.run();
             }
         });
@@ -38,26 +37,17 @@ public final class SharpCanvas extends Parent {
      * @param toHeight in logical pixels
      */
     public void size(double toWidth, double toHeight) {
-        width = toWidth;
-        height = toHeight;
-        resize();
+        setMinSize(toWidth, toHeight);
+        setMaxSize(toWidth, toHeight);
+        resize(toWidth, toHeight);
+        fit();
     }
 
-    private void resize() {
-        canvas.setWidth(Math.round(width * sharpness));
-        canvas.setHeight(Math.round(height * sharpness));
+    private void fit() {
+        canvas.setWidth(Math.round(getMinWidth() * sharpness));
+        canvas.setHeight(Math.round(getMinHeight() * sharpness));
         back.setX(1 / sharpness);
         back.setY(1 / sharpness);
-    }
-
-    /** {@return its width in logical pixels} */
-    public double width() {
-        return width;
-    }
-
-    /** {@return its height in logical pixels} */
-    public double height() {
-        return height;
     }
 
     /** {@return how many pixels a logical one has by the size of the window's content} */

@@ -23,6 +23,7 @@ public final class Session {
     private final IntegerProperty layer = new SimpleIntegerProperty();
     private final StringProperty selected = new SimpleStringProperty("");
     private final StringProperty lit = new SimpleStringProperty("");
+    private final StringProperty solute = new SimpleStringProperty("");
     private final StringProperty status = new SimpleStringProperty("");
     private final ObjectProperty<NumberForm> numbers = new SimpleObjectProperty<>(NumberForm.SPACE_POINT);
     private final Notices notices = new Notices();
@@ -48,6 +49,7 @@ public final class Session {
     public void show(Optional<OpenSet> opened) {
         lit.set("");
         faceFlows.set(FaceFlows.NONE);
+        solute.set("");
         selected.set("");
         interval.set(0);
         layer.set(0);
@@ -98,6 +100,11 @@ public final class Session {
     /** {@return what has been done, what to know, what was refused} */
     public Notices notices() {
         return notices;
+    }
+
+    /** {@return the name of the solute whose budget is looked at; empty for water's} */
+    public StringProperty solute() {
+        return solute;
     }
 
     /** {@return what the status line says can be done now} */

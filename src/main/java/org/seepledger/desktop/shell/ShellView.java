@@ -12,6 +12,7 @@ import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyCombination;
 import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.BorderPane;
+import javafx.scene.layout.Region;
 import javafx.scene.layout.StackPane;
 import org.seepledger.desktop.action.Action;
 import org.seepledger.desktop.action.Actions;
@@ -31,6 +32,11 @@ public final class ShellView extends StackPane {
             EnumSet.of(KeyCode.A, KeyCode.C, KeyCode.V, KeyCode.X, KeyCode.Z, KeyCode.Y, KeyCode.HOME, KeyCode.END);
     private static final Set<KeyCode> WORKING_KEYS =
             EnumSet.of(KeyCode.TAB, KeyCode.ENTER, KeyCode.SPACE, KeyCode.DELETE, KeyCode.BACK_SPACE);
+
+    /** Less room than this, and what lies over the map would lie over each other: then the whole is scrolled. */
+    private static final double LEAST_WIDTH = 1180;
+
+    private static final double LEAST_HEIGHT = 720;
 
     private final ShellModel model;
     private final Actions actions;
@@ -74,10 +80,32 @@ public final class ShellView extends StackPane {
                 lift();
             }
         });
-        getChildren().addAll(work, slots.welcome(), veil);
+        getChildren().addAll(work, slots.welcome());
         slots.welcome().visibleProperty().bind(model.atWelcome());
         work.visibleProperty().bind(model.atWelcome().not());
+        work.visibleProperty().addListener((visible, before, after) -> requestLayout());
+        work.setMinSize(LEAST_WIDTH, LEAST_HEIGHT);
         addEventFilter(KeyEvent.KEY_PRESSED, this::onKey);
+    }
+
+    /** The page that is not shown needs no room, but is laid out, so that it is there at once when it is turned to. */
+    @Override
+    protected double computeMinWidth(double height) {
+        return shown().minWidth(height);
+    }
+
+    @Override
+    protected double computeMinHeight(double width) {
+        return shown().minHeight(width);
+    }
+
+    private Node shown() {
+        return work.isVisible() ? work : slots.welcome();
+    }
+
+    /** {@return what lies over the window while a page is read} */
+    public Region veil() {
+        return veil;
     }
 
     private Node panes() {

@@ -18,10 +18,8 @@ import javafx.scene.transform.Scale;
  */
 public final class Magnifier extends Region {
 
-    private static final double LEAST_WIDTH = 1200;
-    private static final double LEAST_HEIGHT = 740;
-
     private final Region content;
+    private final Region above;
     private final Scale scale = new Scale(1, 1);
     private final DoubleProperty factor = new SimpleDoubleProperty(1);
     private final ScrollBar across = bar(Orientation.HORIZONTAL);
@@ -31,15 +29,18 @@ public final class Magnifier extends Region {
      * Lays a magnifier over content.
      *
      * @param content what is shown
+     * @param above what may lie over all that is seen, and is not scrolled
      */
-    public Magnifier(Region content) {
+    public Magnifier(Region content, Region above) {
         this.content = content;
+        this.above = above;
+        above.getTransforms().add(scale);
         content.getTransforms().add(scale);
         Rectangle clip = new Rectangle();
         clip.widthProperty().bind(widthProperty());
         clip.heightProperty().bind(heightProperty());
         setClip(clip);
-        getChildren().addAll(content, across, down);
+        getChildren().addAll(content, across, down, above);
         factor.addListener((now, before, after) -> {
             scale.setX(after.doubleValue());
             scale.setY(after.doubleValue());
@@ -73,8 +74,8 @@ public final class Magnifier extends Region {
 
     @Override
     protected void layoutChildren() {
-        double needsWidth = needs(LEAST_WIDTH, content.minWidth(-1));
-        double needsHeight = needs(LEAST_HEIGHT, content.minHeight(-1));
+        double needsWidth = factor.get() * content.minWidth(-1);
+        double needsHeight = factor.get() * content.minHeight(-1);
         double thick = down.prefWidth(-1);
         boolean tall = needsHeight > getHeight() + 0.5;
         boolean wide = needsWidth > getWidth() - (tall ? thick : 0) + 0.5;
@@ -85,16 +86,12 @@ public final class Magnifier extends Region {
         place(down, tall, Math.max(needsHeight, seenHeight), seenHeight);
         across.resizeRelocate(0, seenHeight, seenWidth, thick);
         down.resizeRelocate(seenWidth, 0, thick, seenHeight);
+        above.resizeRelocate(0, 0, getWidth() / factor.get(), getHeight() / factor.get());
         content.resizeRelocate(
                 -Math.round(across.getValue()),
                 -Math.round(down.getValue()),
                 Math.max(needsWidth, seenWidth) / factor.get(),
                 Math.max(needsHeight, seenHeight) / factor.get());
-    }
-
-    /** As long as nothing is enlarged, the room is all there is: content then gives way as far as it can. */
-    private double needs(double least, double atLeast) {
-        return factor.get() * Math.max(atLeast, factor.get() > 1 ? least : 0);
     }
 
     private static void place(ScrollBar bar, boolean shown, double whole, double seen) {
@@ -119,7 +116,7 @@ public final class Magnifier extends Region {
 
     /** Brings the node that has the keyboard into view; of a large one its beginning. */
     private void show(Node node) {
-        if (node != null && (across.isVisible() || down.isVisible())) {
+        if (node != null && !above.isVisible() && (across.isVisible() || down.isVisible())) {
             layout();
             Bounds place = sceneToLocal(node.localToScene(node.getBoundsInLocal()));
             move(across, beyond(place.getMinX(), place.getMaxX(), getWidth() - down.getWidth()));
