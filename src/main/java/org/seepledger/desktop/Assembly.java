@@ -14,12 +14,16 @@ import org.seepledger.desktop.draw.DraftHand;
 import org.seepledger.desktop.draw.DraftModel;
 import org.seepledger.desktop.draw.Tray;
 import org.seepledger.desktop.folio.Folio;
+import org.seepledger.desktop.handover.HandoverModel;
+import org.seepledger.desktop.handover.HandoverPage;
 import org.seepledger.desktop.map.GroundModel;
 import org.seepledger.desktop.map.MapModel;
 import org.seepledger.desktop.map.MapView;
 import org.seepledger.desktop.map.ShowingBar;
+import org.seepledger.desktop.paint.PicturePng;
 import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.port.FileDialogs;
+import org.seepledger.desktop.port.Opener;
 import org.seepledger.desktop.port.Questions;
 import org.seepledger.desktop.port.RecentFolders;
 import org.seepledger.desktop.port.Settings;
@@ -64,7 +68,8 @@ final class Assembly {
             Questions questions,
             CopyBoard copies,
             RecentFolders folders,
-            Settings settings) {}
+            Settings settings,
+            Opener opener) {}
 
     Assembly(Outside outside, List<Path> samplePlaces) {
         this.outside = outside;
@@ -90,11 +95,18 @@ final class Assembly {
                 mapView,
                 Optional.of(folio.pages()),
                 Optional.of(folio.ribbon()));
-        this.view = new ShellView(shell, slots, actions, running, preferences);
+        this.view = new ShellView(shell, slots, actions, running, preferences, outside.settings());
         actions.add(actionsOfWindow());
         actions.add(mapView.actions());
         actions.add(new DraftActions(draft, hand, files, tray, mapView::repaint).all(map));
         actions.add(folio.actions());
+        HandoverModel handover = new HandoverModel(
+                session, outside.tasks(), outside.dialogs(), outside.copies(), outside.opener(), new PicturePng());
+        HandoverPage handoverPage = new HandoverPage(handover, view::lift);
+        actions.add(List.of(new Action("actions.group.file", "action.handover", "Shortcut+E", () -> {
+            view.lower(handoverPage);
+            handoverPage.open();
+        })));
         Magnifier magnifier = new Magnifier(view, view.veil());
         this.scene = new Scene(magnifier, 1280, 800);
         Dress.put(scene, shell.theme(), preferences.size());
@@ -116,6 +128,8 @@ final class Assembly {
                 new Action(window, "action.welcome", "Shortcut+Home", shell::turnPage),
                 new Action(window, "action.theme", "F9", shell::switchTheme),
                 new Action(window, "action.pane", "F6", view::nextPane),
+                new Action(window, "action.fold.side", "Shift+F6", view::turnSide),
+                new Action(window, "action.fold.below", "Shortcut+F6", view::turnBelow),
                 new Action(window, "action.caution", "Shift+F1", view::showCaution),
                 new Action(window, "action.notices", "F7", view::showNotices),
                 new Action(window, "action.running", "F10", view::showRunning),

@@ -5,6 +5,7 @@ import java.util.prefs.Preferences;
 import javafx.application.Application;
 import javafx.application.Platform;
 import javafx.stage.Stage;
+import org.seepledger.desktop.platform.HostOpener;
 import org.seepledger.desktop.platform.PreferredFolders;
 import org.seepledger.desktop.platform.PreferredSettings;
 import org.seepledger.desktop.platform.ScreenCopyBoard;
@@ -36,7 +37,8 @@ public final class WindowApplication extends Application {
                         new ScreenQuestions(stage),
                         new ScreenCopyBoard(),
                         new PreferredFolders(kept),
-                        new PreferredSettings(kept)),
+                        new PreferredSettings(kept),
+                        new HostOpener(getHostServices())),
                 Samples.usualPlaces());
         stage.setTitle(Words.of("program"));
         stage.setMinWidth(LEAST_WIDTH);

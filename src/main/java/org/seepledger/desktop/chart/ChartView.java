@@ -20,7 +20,7 @@ import org.seepledger.picture.Picture;
 /** The chart, and above it the slider of the interval looked at; a click or drag on the chart moves it too. */
 public final class ChartView extends BorderPane {
 
-    private static final double LEAST_HEIGHT = 236;
+    private static final double LEAST_HEIGHT = 196;
 
     private final ChartModel model;
     private final PictureView picture;
@@ -37,6 +37,7 @@ public final class ChartView extends BorderPane {
         this.model = model;
         this.picture = new PictureView((PictureView.ForSize) this::draw, theme);
         setId("chart");
+        getStyleClass().add("sl-pane");
         picture.setId("chart-picture");
         picture.setCursor(Cursor.HAND);
         picture.setOnMousePressed(this::look);

@@ -11,6 +11,7 @@ import javafx.beans.property.ReadOnlyLongWrapper;
 import javafx.beans.property.SimpleObjectProperty;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.GriddedValues;
+import org.seepledger.desktop.session.DrawnShapes;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.sketch.Drawing;
@@ -86,10 +87,15 @@ public final class DraftModel {
                                 .map(shape -> shape.prism(layers, (surface, lid) -> surfaces.get(surface)))
                                 .toList(),
                         settled));
+        tellShapes();
         if (history.current().find(session.selected().get()).isEmpty()) {
             session.selected().set("");
         }
         version.set(version.get() + 1);
+    }
+
+    private void tellShapes() {
+        session.shapes().set(new DrawnShapes(history.settled(), !isUnsaved()));
     }
 
     /**
@@ -235,6 +241,7 @@ public final class DraftModel {
      */
     public void kept(Drawing kept) {
         saved = kept;
+        tellShapes();
         version.set(version.get() + 1);
     }
 

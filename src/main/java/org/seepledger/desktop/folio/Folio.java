@@ -36,6 +36,7 @@ public final class Folio {
     private final HBox marks = new HBox();
     private final Reading reading;
     private final LiveBudget live;
+    private final LivePlume plumes;
     private final Session session;
     private final LedgerModel ledger;
     private final Node ribbon;
@@ -54,7 +55,7 @@ public final class Folio {
         this.live = new LiveBudget(session, tasks);
         new FaceFeed(session, live, reading).begin();
         SoluteLook look = new SoluteLook(session);
-        LivePlume plumes = new LivePlume(session, look, tasks);
+        this.plumes = new LivePlume(session, look, tasks);
         this.ledger = new LedgerModel(session, live, reading, plumes, new MassReading(session, reading), copies);
         pages.setId("folio");
         pages.getStyleClass().add("sl-folio");
@@ -107,6 +108,7 @@ public final class Folio {
     /** Works out again what was stopped or failed. */
     public void again() {
         live.again();
+        plumes.again();
     }
 
     /** {@return what can be done here} */

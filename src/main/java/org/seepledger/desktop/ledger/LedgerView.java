@@ -38,12 +38,14 @@ public final class LedgerView extends BorderPane {
         getStyleClass().add("sl-ledger");
         setTop(new LedgerChoices(model));
         buildTable();
-        setCenter(new StatePane(table, model.state()).withAction(Words.of("budget.draw"), model::draw));
+        BorderPane sheet = new BorderPane(table);
+        sheet.setBottom(new LedgerFoot(model));
+        setCenter(new StatePane(sheet, model.state()).withAction(Words.of("budget.draw"), model::draw));
     }
 
     private void buildTable() {
         table.setId("ledger-table");
-        table.setItems(model.rows());
+        table.setItems(model.rows().filtered(row -> !LedgerFoot.isTotal(row)));
         table.setColumnResizePolicy(TableView.CONSTRAINED_RESIZE_POLICY_FLEX_LAST_COLUMN);
         table.setPlaceholder(new Label());
         table.getColumns().add(nameColumn());
@@ -95,8 +97,8 @@ public final class LedgerView extends BorderPane {
         TableColumn<LedgerRow, LedgerRow> column = new TableColumn<>();
         column.setGraphic(header(words, order));
         column.getStyleClass().add("sl-numbers");
-        column.setMinWidth(102);
-        column.setPrefWidth(102);
+        column.setMinWidth(84);
+        column.setPrefWidth(92);
         return shown(column, new NumberCell.Factory(value, model));
     }
 
@@ -116,8 +118,8 @@ public final class LedgerView extends BorderPane {
 
     private TableColumn<LedgerRow, LedgerRow> scaleColumn() {
         TableColumn<LedgerRow, LedgerRow> column = new TableColumn<>();
-        column.setMinWidth(60);
-        column.setPrefWidth(90);
+        column.setMinWidth(48);
+        column.setPrefWidth(56);
         return shown(column, new ScaleCell.Factory(model));
     }
 

@@ -9,7 +9,6 @@ import javafx.scene.canvas.GraphicsContext;
 import javafx.scene.layout.Region;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.desktop.paint.MarkPainter;
-import org.seepledger.desktop.paint.Paints;
 import org.seepledger.desktop.paint.SharpCanvas;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
@@ -56,7 +55,7 @@ final class MapCanvas extends Region {
             model.values().view(),
             model.values().scale(),
             model.contours().lines(),
-            model.flux().field(),
+            model.flux().flux(),
             model.overlays().lines(),
             model.overlays().arrows(),
             theme
@@ -119,10 +118,7 @@ final class MapCanvas extends Region {
 
     private void paintGround() {
         GraphicsContext canvas = ground.context();
-        canvas.setFill(Paints.of(Ink.Token.PAPER, 1, theme.getValue()));
-        canvas.fillRect(0, 0, ground.getWidth(), ground.getHeight());
-        canvas.setFill(Paints.of(Ink.Token.GUIDE, 0.35, theme.getValue()));
-        canvas.fillRect(0, 0, ground.getWidth(), ground.getHeight());
+        canvas.clearRect(0, 0, ground.getWidth(), ground.getHeight());
         if (model.session().set().get().isEmpty()) {
             return;
         }
@@ -139,7 +135,7 @@ final class MapCanvas extends Region {
         }
         painter.paint(contours(camera));
         if (model.overlays().arrows().get()) {
-            model.flux().field().get().ifPresent(field -> painter.paint(FluxArrows.of(field, aquifer.grid(), camera)));
+            model.flux().flux().get().ifPresent(flux -> painter.paint(FluxArrows.of(flux, aquifer.grid(), camera)));
         }
     }
 

@@ -16,7 +16,7 @@ import org.seepledger.report.CellPlace;
 /** What the map shows: which part of it, which values, and where the cursor is. */
 public final class MapModel {
 
-    private static final double MARGIN = 48;
+    private static final double MARGIN = 36;
 
     /** How many pixels a cell has at least after the map went to it. */
     private static final double CELL_SEEN = 24;

@@ -2,6 +2,7 @@ package org.seepledger.desktop.shell;
 
 import java.util.EnumSet;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import javafx.geometry.Orientation;
 import javafx.scene.Node;
@@ -19,6 +20,7 @@ import org.seepledger.desktop.action.Actions;
 import org.seepledger.desktop.action.ActionsPage;
 import org.seepledger.desktop.notice.NoticeLine;
 import org.seepledger.desktop.notice.NoticePage;
+import org.seepledger.desktop.port.Settings;
 import org.seepledger.desktop.preferences.PreferencesModel;
 import org.seepledger.desktop.preferences.PreferencesPage;
 import org.seepledger.desktop.running.RunningList;
@@ -37,10 +39,19 @@ public final class ShellView extends StackPane {
     private static final double LEAST_WIDTH = 1180;
 
     private static final double LEAST_HEIGHT = 720;
+    /** How wide the pane beside the map is at first, in logical pixels, at least, and as a share of the window. */
+    private static final double[] SIDE = {452, 0.3};
+
+    /** How high the pane below it is at first. */
+    private static final double[] BELOW = {196, 0.22};
 
     private final ShellModel model;
     private final Actions actions;
     private final Slots slots;
+    private final SplitPane across = new SplitPane();
+    private final SplitPane down = new SplitPane();
+    private final Optional<Fold> side;
+    private final Optional<Fold> below;
     private final BorderPane work = new BorderPane();
     private final StackPane veil = new StackPane();
     private final ActionsPage actionsPage;
@@ -57,16 +68,28 @@ public final class ShellView extends StackPane {
      * @param actions everything that can be done
      * @param running what runs beside the window
      * @param preferences what users want for good
+     * @param settings keep how large panes are
      */
     public ShellView(
-            ShellModel model, Slots slots, Actions actions, RunningModel running, PreferencesModel preferences) {
+            ShellModel model,
+            Slots slots,
+            Actions actions,
+            RunningModel running,
+            PreferencesModel preferences,
+            Settings settings) {
         this.model = model;
         this.slots = slots;
         this.actions = actions;
         this.actionsPage = new ActionsPage(actions, this::lift);
-        work.setTop(new Caption(model, slots.showing(), this::showActions));
         work.setCenter(panes());
         this.preferencesPage = new PreferencesPage(preferences, this::lift);
+        across.getItems().add(slots.map());
+        this.side = slots.ledger().map(pane -> new Fold(across, pane, SIDE[0], SIDE[1], settings, "side.width"));
+        this.below = slots.ribbon().map(pane -> new Fold(down, pane, BELOW[0], BELOW[1], settings, "below.height"));
+        Caption caption = new Caption(model, slots.showing(), this::showActions);
+        side.ifPresent(fold -> caption.add(fold.button("fold-side", "action.fold.side")));
+        below.ifPresent(fold -> caption.add(fold.button("fold-below", "action.fold.below")));
+        work.setTop(caption);
         this.noticePage = new NoticePage(model.session().notices(), this::lift);
         this.runningList = new RunningList(running, this::lift);
         work.setBottom(new Footer(
@@ -109,20 +132,19 @@ public final class ShellView extends StackPane {
     }
 
     private Node panes() {
-        SplitPane across = new SplitPane(slots.map());
-        slots.ledger().ifPresent(ledger -> {
-            across.getItems().add(ledger);
-            across.setDividerPositions(0.6);
-            SplitPane.setResizableWithParent(ledger, false);
-        });
-        SplitPane down = new SplitPane(across);
         down.setOrientation(Orientation.VERTICAL);
-        slots.ribbon().ifPresent(ribbon -> {
-            down.getItems().add(ribbon);
-            down.setDividerPositions(0.74);
-            SplitPane.setResizableWithParent(ribbon, false);
-        });
+        down.getItems().add(across);
         return down;
+    }
+
+    /** Folds the pane beside the map away, or shows it again. */
+    public void turnSide() {
+        side.ifPresent(Fold::turn);
+    }
+
+    /** Folds the pane below the map away, or shows it again. */
+    public void turnBelow() {
+        below.ifPresent(Fold::turn);
     }
 
     /** Shows the page of all actions. */
@@ -157,7 +179,8 @@ public final class ShellView extends StackPane {
 
     /** Moves the keyboard to the next pane. */
     public void nextPane() {
-        List<Node> panes = slots.panes();
+        List<Node> panes =
+                slots.panes().stream().filter(pane -> pane.getScene() != null).toList();
         Node owner = getScene().getFocusOwner();
         int here = -1;
         for (int pane = 0; pane < panes.size(); pane++) {
@@ -198,12 +221,18 @@ public final class ShellView extends StackPane {
         return false;
     }
 
-    private void lower(Node page) {
+    /**
+     * Shows a page over all else until it is lifted.
+     *
+     * @param page the page
+     */
+    public void lower(Node page) {
         veil.getChildren().setAll(page);
         veil.setVisible(true);
     }
 
-    private void lift() {
+    /** Puts away what is shown over all else. */
+    public void lift() {
         veil.setVisible(false);
         veil.getChildren().clear();
         focusIn(model.atWelcome().get() ? slots.welcome() : slots.map());

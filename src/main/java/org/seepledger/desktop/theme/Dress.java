@@ -8,6 +8,7 @@ import javafx.application.Application;
 import javafx.beans.value.ObservableValue;
 import javafx.scene.Parent;
 import javafx.scene.Scene;
+import javafx.scene.paint.Color;
 
 /** Dresses a scene in a theme, and again whenever the theme changes. */
 public final class Dress {
@@ -27,10 +28,10 @@ public final class Dress {
      * @param size how large everything is, in percent: menus and tips are no part of the scene, and are told by a sheet
      */
     public static void put(Scene scene, ObservableValue<Theme> theme, ObservableValue<Integer> size) {
-        wear(scene.getRoot(), theme.getValue());
+        wear(scene, theme.getValue());
         enlargeMenus(scene, size.getValue());
         size.addListener((now, before, after) -> enlargeMenus(scene, after));
-        theme.addListener((now, before, after) -> wear(scene.getRoot(), after));
+        theme.addListener((now, before, after) -> wear(scene, after));
     }
 
     private static void enlargeMenus(Scene scene, int percent) {
@@ -41,7 +42,10 @@ public final class Dress {
         scene.getStylesheets().setAll(SHEET, sheet);
     }
 
-    private static void wear(Parent root, Theme theme) {
+    /** The map has no ground of its own but the scene's, which costs nothing to paint, however often the map moves. */
+    private static void wear(Scene scene, Theme theme) {
+        scene.setFill(Color.web(theme.ground().toString()));
+        Parent root = scene.getRoot();
         Application.setUserAgentStylesheet(
                 theme == Theme.LIGHT
                         ? new PrimerLight().getUserAgentStylesheet()

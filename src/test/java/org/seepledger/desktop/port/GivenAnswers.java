@@ -10,7 +10,7 @@ import java.util.Map;
 import java.util.Optional;
 
 /** A machine that answers what a test told it to, and keeps what it was given. */
-public final class GivenAnswers implements FileDialogs, CopyBoard, Questions, RecentFolders, Settings {
+public final class GivenAnswers implements FileDialogs, CopyBoard, Questions, RecentFolders, Settings, Opener {
 
     /** The answers to come, in order: paths for dialogs, numbers for questions. */
     public final Deque<Optional<Path>> paths = new ArrayDeque<>();
@@ -26,6 +26,9 @@ public final class GivenAnswers implements FileDialogs, CopyBoard, Questions, Re
 
     /** What is kept from run to run. */
     public final Map<String, String> settings = new HashMap<>();
+
+    /** What was opened. */
+    public final List<Path> opened = new ArrayList<>();
 
     private final List<Path> recent = new ArrayList<>();
 
@@ -70,6 +73,11 @@ public final class GivenAnswers implements FileDialogs, CopyBoard, Questions, Re
     @Override
     public void put(String key, String value) {
         settings.put(key, value);
+    }
+
+    @Override
+    public void open(Path path) {
+        opened.add(path);
     }
 
     @Override
