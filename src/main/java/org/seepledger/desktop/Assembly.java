@@ -4,7 +4,11 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Stream;
+import javafx.beans.binding.Bindings;
+import javafx.beans.binding.BooleanBinding;
+import javafx.scene.Node;
 import javafx.scene.Scene;
+import javafx.scene.layout.StackPane;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.desktop.action.Action;
 import org.seepledger.desktop.action.Actions;
@@ -16,6 +20,10 @@ import org.seepledger.desktop.draw.Tray;
 import org.seepledger.desktop.folio.Folio;
 import org.seepledger.desktop.handover.HandoverModel;
 import org.seepledger.desktop.handover.HandoverPage;
+import org.seepledger.desktop.intake.IntakeModel;
+import org.seepledger.desktop.intake.IntakeView;
+import org.seepledger.desktop.intake.MendModel;
+import org.seepledger.desktop.intake.MendView;
 import org.seepledger.desktop.map.GroundModel;
 import org.seepledger.desktop.map.MapModel;
 import org.seepledger.desktop.map.MapView;
@@ -50,6 +58,8 @@ final class Assembly {
     private final PreferencesModel preferences;
     private final ShellModel shell;
     private final WelcomeModel welcome;
+    private final IntakeModel intake;
+    private final MendModel mend;
     private final MapModel map;
     private final DraftModel draft;
     private final DraftHand hand;
@@ -78,6 +88,10 @@ final class Assembly {
         this.map = new MapModel(session, outside.tasks());
         this.welcome = new WelcomeModel(
                 outside.tasks(), outside.dialogs(), outside.folders(), this::show, go -> files().whenSafe(go));
+        this.intake = new IntakeModel(outside.tasks(), outside.dialogs(), welcome::open);
+        this.mend = new MendModel(outside.tasks(), welcome::open);
+        welcome.whenLoose(this::bring);
+        welcome.whenWrong(mend::mend);
         Actions actions = new Actions();
         this.draft = new DraftModel(session);
         this.hand = new DraftHand(draft);
@@ -88,13 +102,9 @@ final class Assembly {
         draft.version().addListener((version, before, after) -> mapView.repaint());
         draft.tool().addListener((tool, before, after) -> mapView.repaint());
         this.running = new RunningModel(outside.tasks()::running);
-        this.folio = new Folio(session, outside.tasks(), outside.copies(), shell.theme());
+        this.folio = new Folio(session, outside.tasks(), outside.dialogs(), outside.copies(), shell.theme());
         Slots slots = new Slots(
-                new WelcomeView(welcome),
-                new ShowingBar(map),
-                mapView,
-                Optional.of(folio.pages()),
-                Optional.of(folio.ribbon()));
+                firstPages(), new ShowingBar(map), mapView, Optional.of(folio.pages()), Optional.of(folio.ribbon()));
         this.view = new ShellView(shell, slots, actions, running, preferences, outside.settings());
         actions.add(actionsOfWindow());
         actions.add(mapView.actions());
@@ -125,6 +135,7 @@ final class Assembly {
         return List.of(
                 new Action(window, "action.list", "F1", view::showActions),
                 new Action(window, "action.open", "Shortcut+O", welcome::choose),
+                new Action(window, "action.intake", "Shortcut+Shift+O", this::turnToIntake),
                 new Action(window, "action.welcome", "Shortcut+Home", shell::turnPage),
                 new Action(window, "action.theme", "F9", shell::switchTheme),
                 new Action(window, "action.pane", "F6", view::nextPane),
@@ -147,6 +158,38 @@ final class Assembly {
     private void wantUnits() {
         folio.reading()
                 .want(preferences.rateUnit().get(), preferences.volumeUnit().get());
+    }
+
+    /** One behind the other; what is behind is hidden from the keyboard too. */
+    private Node firstPages() {
+        WelcomeView first = new WelcomeView(welcome);
+        IntakeView loose = new IntakeView(intake, this::leaveIntake);
+        MendView wrong = new MendView(mend);
+        BooleanBinding mending =
+                Bindings.createBooleanBinding(() -> mend.folder().get().isPresent(), mend.folder());
+        first.visibleProperty().bind(intake.shown().or(mending).not());
+        loose.visibleProperty().bind(intake.shown().and(mending.not()));
+        wrong.visibleProperty().bind(mending);
+        return new StackPane(first, loose, wrong);
+    }
+
+    private void turnToIntake() {
+        if (intake.shown().get() && shell.atWelcome().get()) {
+            leaveIntake();
+        } else {
+            bring(List.of());
+        }
+    }
+
+    /** Shows the import assistant, with more files. */
+    private void bring(List<Path> paths) {
+        shell.atWelcome().set(true);
+        intake.bring(paths);
+    }
+
+    private void leaveIntake() {
+        intake.shown().set(false);
+        shell.atWelcome().set(session.set().get().isEmpty());
     }
 
     private void again() {
@@ -224,5 +267,13 @@ final class Assembly {
 
     WelcomeModel welcome() {
         return welcome;
+    }
+
+    MendModel mend() {
+        return mend;
+    }
+
+    IntakeModel intake() {
+        return intake;
     }
 }

@@ -4,6 +4,7 @@ import java.nio.file.Path;
 import java.util.prefs.Preferences;
 import javafx.application.Application;
 import javafx.application.Platform;
+import javafx.scene.image.Image;
 import javafx.stage.Stage;
 import org.seepledger.desktop.platform.HostOpener;
 import org.seepledger.desktop.platform.PreferredFolders;
@@ -40,6 +41,7 @@ public final class WindowApplication extends Application {
                         new PreferredSettings(kept),
                         new HostOpener(getHostServices())),
                 Samples.usualPlaces());
+        stage.getIcons().add(new Image(WindowApplication.class.getResourceAsStream("icon.png")));
         stage.setTitle(Words.of("program"));
         stage.setMinWidth(LEAST_WIDTH);
         stage.setMinHeight(LEAST_HEIGHT);

@@ -11,6 +11,7 @@ import org.seepledger.aquifer.Window;
 import org.seepledger.balance.Balance;
 import org.seepledger.balance.Periods;
 import org.seepledger.balance.Span;
+import org.seepledger.balance.Trace;
 import org.seepledger.balance.WaterBalance;
 import org.seepledger.balance.WellRule;
 import org.seepledger.fault.UsageFault;
@@ -186,6 +187,20 @@ public final class Workbench implements AutoCloseable {
         DrawingWriter.write(file, crs().name(), drawing);
     }
 
+    /**
+     * Makes sure that a file holds a drawing and nothing else.
+     *
+     * @param file the file
+     * @param drawing the drawing
+     * @throws UsageFault if it does not
+     */
+    public void mustHold(Path file, Drawing drawing) {
+        if (!drawing(file).drawing().equals(drawing)) {
+            throw new UsageFault("The file " + file + " holds other prisms than are drawn: it was changed meanwhile."
+                    + " Save the drawing, then go on.");
+        }
+    }
+
     /** The set's folder, for what stands beside its description. */
     DataFolder besides() {
         return DataFolder.holding(folder.inputs().get(AquiferReader.FILE), AquiferReader.FILE);
@@ -257,6 +272,42 @@ public final class Workbench implements AutoCloseable {
     /** {@return what answers questions about solutes} */
     public SoluteBench solutes() {
         return solutes;
+    }
+
+    /**
+     * Traces a row of a prism's budget to the stored values that it rests on.
+     *
+     * @param prism the prism; what lies beyond the grid is cut off
+     * @param row the row, as {@code PRISM/PERIOD/GROUP/ITEM/LAYER}; the layer of a total or of an item over all layers is {@code *}
+     * @param periods the periods that one of is named
+     * @param units the units of results
+     * @param most how many values are kept, those that contribute the most
+     * @param progress told how far the work is
+     * @return the number and its values
+     * @throws UsageFault if there is no such row, it has no number, or it is no sum
+     * @throws org.seepledger.fault.DataFault if the data are wrong
+     * @throws Cancelled if the work was stopped
+     */
+    public TracedNumber trace(
+            Prism prism, String row, List<Period> periods, ResultUnits units, int most, Progress progress) {
+        return gate.ask(progress, until -> {
+            List<Prism> admitted = List.of(reader(note -> {}).admitted(prism));
+            BudgetRow named = BudgetRow.of(row, aquifer(), admitted, periods);
+            Balance balance = WaterBalance.of(aquifer(), admitted, WellRule.POINT, threads(), until);
+            RowNumber number = RowNumber.of(named, balance.ledgers().get(0), units);
+            LargestLines lines = new LargestLines(most);
+            Trace.Sum sum = Trace.of(
+                    aquifer(),
+                    named.prism(),
+                    WellRule.POINT,
+                    number.traced(),
+                    named.period(),
+                    units.rateFactor(),
+                    lines,
+                    until);
+            number.mustBe(sum);
+            return new TracedNumber(row, named.period(), number.net(), units, sum.value(), sum.lines(), lines.lines());
+        });
     }
 
     /**

@@ -1,9 +1,12 @@
 package org.seepledger.desktop.ledger;
 
+import java.util.Optional;
 import javafx.collections.ListChangeListener;
 import javafx.css.PseudoClass;
 import javafx.scene.control.Button;
+import javafx.scene.control.ContextMenu;
 import javafx.scene.control.Label;
+import javafx.scene.control.MenuItem;
 import javafx.scene.control.TableColumn;
 import javafx.scene.control.TableRow;
 import javafx.scene.control.TableView;
@@ -57,12 +60,17 @@ public final class LedgerView extends BorderPane {
         table.getColumns().add(scaleColumn());
         table.setRowFactory(made -> new KindRow());
         table.getSelectionModel().selectedItemProperty().addListener((row, before, after) -> {
+            model.chosen().set(Optional.ofNullable(after));
             if (!following && after != null) {
                 model.light(after);
             }
         });
         model.litItem().addListener((item, before, after) -> follow());
         model.rows().addListener((ListChangeListener<LedgerRow>) change -> follow());
+        MenuItem origin = new MenuItem(Words.of("ledger.origin"));
+        origin.setId("ledger-origin-menu");
+        origin.setOnAction(pressed -> model.askOrigin());
+        table.setContextMenu(new ContextMenu(origin));
         table.setOnKeyPressed(key -> {
             if (COPY.match(key)) {
                 model.copy();

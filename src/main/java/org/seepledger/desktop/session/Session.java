@@ -1,5 +1,6 @@
 package org.seepledger.desktop.session;
 
+import java.util.List;
 import java.util.Optional;
 import java.util.TreeMap;
 import javafx.beans.property.IntegerProperty;
@@ -15,6 +16,7 @@ import javafx.collections.ObservableMap;
 import org.seepledger.desktop.notice.Notices;
 import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.job.ShownPicture;
+import org.seepledger.job.TracedNumber;
 import org.seepledger.prism.Prism;
 import org.seepledger.report.CellPlace;
 
@@ -29,6 +31,8 @@ public final class Session {
     private final IntegerProperty layer = new SimpleIntegerProperty();
     private final StringProperty selected = new SimpleStringProperty("");
     private final StringProperty lit = new SimpleStringProperty("");
+    private final ObjectProperty<List<TracedNumber.Cell>> marked = new SimpleObjectProperty<>(List.of());
+    private final ObjectProperty<Optional<RowAsked>> asked = new SimpleObjectProperty<>(Optional.empty());
     private final StringProperty solute = new SimpleStringProperty("");
     private final StringProperty status = new SimpleStringProperty("");
     private final ObjectProperty<NumberForm> numbers = new SimpleObjectProperty<>(NumberForm.SPACE_POINT);
@@ -54,6 +58,7 @@ public final class Session {
      */
     public void show(Optional<OpenSet> opened) {
         lit.set("");
+        marked.set(List.of());
         faceFlows.set(FaceFlows.NONE);
         solute.set("");
         selected.set("");
@@ -111,6 +116,16 @@ public final class Session {
     /** {@return how numbers are written in the window} */
     public ObjectProperty<NumberForm> numbers() {
         return numbers;
+    }
+
+    /** {@return the cells that are lit up, since a number rests on values in them} */
+    public ObjectProperty<List<TracedNumber.Cell>> marked() {
+        return marked;
+    }
+
+    /** {@return the row of the selected prism's budget whose origin is asked for; whoever answers empties it} */
+    public ObjectProperty<Optional<RowAsked>> asked() {
+        return asked;
     }
 
     /** {@return what has been done, what to know, what was refused} */

@@ -59,13 +59,13 @@ public final class LivePlume {
         this.session = session;
         this.look = look;
         this.now = new Inquiry<>(
-                tasks.latest("task.solute.interval"),
+                tasks.latest("task.solutes.interval"),
                 (question, progress) -> question.set
                         .workbench()
                         .solutes()
                         .interval(question.prism, question.interval, question.choice, progress));
         this.whole = new Inquiry<>(
-                tasks.latest("task.solute.record"),
+                tasks.latest("task.solutes.record"),
                 (question, progress) ->
                         question.set.workbench().solutes().record(question.prisms, question.choice, progress));
         session.set().addListener((set, before, after) -> begin());

@@ -28,6 +28,8 @@ public final class WelcomeView extends StackPane {
     private final WelcomeModel model;
     private final VBox drop = new VBox();
     private final Label fault = new Label();
+    private final Button mend = new Button();
+    private final HBox failure = new HBox(12, fault, mend);
 
     /**
      * Builds the page.
@@ -67,17 +69,26 @@ public final class WelcomeView extends StackPane {
         fault.setId("open-fault");
         fault.setWrapText(true);
         fault.setMaxWidth(WIDTH);
-        fault.getStyleClass().add("sl-fault");
+        HBox.setHgrow(fault, Priority.ALWAYS);
+        mend.setId("mend-folder");
+        mend.setMinWidth(USE_PREF_SIZE);
+        mend.setOnAction(pressed -> model.mendFailed());
+        failure.getStyleClass().add("sl-fault");
+        failure.setAlignment(Pos.CENTER_LEFT);
+        failure.setMaxWidth(WIDTH);
         model.state().addListener((state, before, after) -> showFault(after));
         showFault(model.state().get());
-        return fault;
+        return failure;
     }
 
     private void showFault(PaneState state) {
         boolean failed = state.phase() == PaneState.Phase.FAILED;
         fault.setText(failed ? Words.of("open.failed", state.words()) : "");
-        fault.setVisible(failed);
-        fault.setManaged(failed);
+        failure.setVisible(failed);
+        failure.setManaged(failed);
+        mend.setVisible(model.failed().get().isPresent());
+        boolean described = model.failed().get().filter(Broken::described).isPresent();
+        mend.setText(described ? Words.of("welcome.mend") : Words.of("welcome.files"));
     }
 
     private Node columns() {
@@ -150,7 +161,12 @@ public final class WelcomeView extends StackPane {
         choose.setDefaultButton(true);
         choose.setOnAction(pressed -> model.choose());
         drop.getStyleClass().add("sl-drop");
-        drop.getChildren().addAll(words, choose);
+        Button bring = new Button(Words.of("welcome.loose"));
+        bring.setId("bring-loose");
+        bring.setOnAction(pressed -> model.bringLoose());
+        HBox buttons = new HBox(10, choose, bring);
+        buttons.setAlignment(Pos.CENTER);
+        drop.getChildren().addAll(words, buttons);
         return drop;
     }
 

@@ -44,6 +44,11 @@ public final class GivenAnswers implements FileDialogs, CopyBoard, Questions, Re
     }
 
     @Override
+    public List<Path> filesToRead(String title) {
+        return folder(title).map(List::of).orElse(List.of());
+    }
+
+    @Override
     public Optional<Path> fileToWrite(String title, Kind kind, Path suggested) {
         return folder(title);
     }
