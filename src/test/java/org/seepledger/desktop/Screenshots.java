@@ -51,6 +51,11 @@ public final class Screenshots {
                 window.robot.press(javafx.scene.input.KeyCode.F1).release(javafx.scene.input.KeyCode.F1);
                 window.settle();
                 both(window, folder, "actions", suffix);
+                window.robot.press(javafx.scene.input.KeyCode.ESCAPE).release(javafx.scene.input.KeyCode.ESCAPE);
+                window.robot.interact(window.assembly().view()::showPreferences);
+                both(window, folder, "preferences", suffix);
+                window.robot.interact(window.assembly().view()::showNotices);
+                both(window, folder, "messages", suffix);
             }
         }
         System.exit(0);

@@ -177,7 +177,8 @@ public final class MapModel {
                         seen.mapX(x),
                         seen.mapY(y),
                         session.layer().get(),
-                        values.view().get())));
+                        values.view().get(),
+                        session.numbers().get())));
     }
 
     /** The cursor has left. */

@@ -15,6 +15,7 @@ import javafx.beans.property.StringProperty;
 import javafx.collections.FXCollections;
 import javafx.collections.ObservableMap;
 import org.seepledger.desktop.notice.Notices;
+import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.job.ShownPicture;
 import org.seepledger.job.TracedNumber;
 import org.seepledger.job.WellPlace;
@@ -38,6 +39,7 @@ public final class Session {
     private final ObjectProperty<Optional<RowAsked>> asked = new SimpleObjectProperty<>(Optional.empty());
     private final StringProperty solute = new SimpleStringProperty("");
     private final StringProperty status = new SimpleStringProperty("");
+    private final ObjectProperty<NumberForm> numbers = new SimpleObjectProperty<>(NumberForm.SPACE_POINT);
     private final Notices notices = new Notices();
     private final ObjectProperty<List<WellPlace>> wells = new SimpleObjectProperty<>(List.of());
     private final ObjectProperty<FaceFlows> faceFlows = new SimpleObjectProperty<>(FaceFlows.NONE);
@@ -122,6 +124,11 @@ public final class Session {
     /** {@return the item of the selected prism's face that is lit up, as {@code side 3}; empty for none} */
     public StringProperty lit() {
         return lit;
+    }
+
+    /** {@return how numbers are written in the window} */
+    public ObjectProperty<NumberForm> numbers() {
+        return numbers;
     }
 
     /** {@return the cells that are lit up, since a number rests on values in them} */
