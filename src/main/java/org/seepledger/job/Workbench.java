@@ -31,6 +31,7 @@ import org.seepledger.ledger.Period;
 import org.seepledger.ledger.PeriodBudget;
 import org.seepledger.picture.Body;
 import org.seepledger.picture.NearbyWell;
+import org.seepledger.picture.Picture;
 import org.seepledger.picture.Profile;
 import org.seepledger.picture.Section;
 import org.seepledger.picture.SectionLine;
@@ -383,6 +384,18 @@ public final class Workbench implements AutoCloseable {
             MapQuantity quantity, int layer, int interval, Window window, int stride, Progress progress) {
         return gate.ask(
                 progress, until -> new LayerReading(aquifer(), until).layer(quantity, layer, interval, window, stride));
+    }
+
+    /**
+     * {@return a map on paper of what a view shows}
+     *
+     * @param asked what it is to show
+     * @param progress told how far the work is
+     * @throws org.seepledger.fault.DataFault if the data are wrong, or the selected prism has no budget
+     * @throws Cancelled if the work was stopped
+     */
+    public Picture map(MapAsked asked, Progress progress) {
+        return new MapOnPaper(this, asked, progress).drawn();
     }
 
     /**

@@ -40,15 +40,27 @@ public final class Screenshots {
                     both(window, folder, page, suffix);
                 }
                 section(window, folder, suffix);
+                window.robot.clickOn("side 3").clickOn("#ledger-origin");
+                window.await(() -> isFilled(window, "#origin-table"));
+                window.robot.interact(() -> window.robot
+                        .lookup("#origin-table")
+                        .queryTableView()
+                        .getSelectionModel()
+                        .selectRange(0, 8));
+                both(window, folder, "origin", suffix);
+                window.robot.clickOn("#folio-ledger").clickOn("#hand-over");
+                window.settle();
+                both(window, folder, "handover", suffix);
+                press(window, javafx.scene.input.KeyCode.ESCAPE);
                 window.robot.interact(() -> {
                     window.assembly().map().showPrism();
                     window.assembly().tray().flipCard();
                 });
-                window.robot.press(javafx.scene.input.KeyCode.TAB).release(javafx.scene.input.KeyCode.TAB);
+                press(window, javafx.scene.input.KeyCode.TAB);
                 window.settle();
                 both(window, folder, "draw", suffix);
                 window.robot.interact(() -> window.assembly().tray().flipCard());
-                window.robot.press(javafx.scene.input.KeyCode.F1).release(javafx.scene.input.KeyCode.F1);
+                press(window, javafx.scene.input.KeyCode.F1);
                 window.settle();
                 both(window, folder, "actions", suffix);
                 window.robot.press(javafx.scene.input.KeyCode.ESCAPE).release(javafx.scene.input.KeyCode.ESCAPE);
@@ -78,6 +90,14 @@ public final class Screenshots {
             window.assembly().shelf().open(0);
         });
         window.settle();
+    }
+
+    private static void press(OpenWindow window, javafx.scene.input.KeyCode key) {
+        window.robot.press(key).release(key);
+    }
+
+    private static boolean isFilled(OpenWindow window, String table) {
+        return !window.robot.lookup(table).queryTableView().getItems().isEmpty();
     }
 
     private static void both(OpenWindow window, Path folder, String name, String suffix) throws IOException {

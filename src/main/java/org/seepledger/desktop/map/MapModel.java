@@ -57,6 +57,7 @@ public final class MapModel {
         });
         session.interval().addListener((interval, before, after) -> findWells());
         session.target().addListener((target, before, after) -> after.ifPresent(this::goTo));
+        new MapOffer(session, this).begin();
     }
 
     /** Puts a cell into the middle, near enough to be seen among its neighbours. */

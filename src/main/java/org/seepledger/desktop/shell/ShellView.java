@@ -91,7 +91,8 @@ public final class ShellView extends StackPane {
         across.getItems().add(slots.map());
         this.side = slots.ledger().map(pane -> new Fold(across, pane, SIDE[0], SIDE[1], settings, "side.width"));
         this.below = slots.ribbon().map(pane -> new Fold(down, pane, BELOW[0], BELOW[1], settings, "below.height"));
-        Caption caption = new Caption(model, slots.showing(), this::showActions);
+        Caption caption =
+                new Caption(model, slots.showing(), this::showActions, () -> actions.perform("action.handover"));
         side.ifPresent(fold -> caption.add(fold.button("fold-side", "action.fold.side")));
         below.ifPresent(fold -> caption.add(fold.button("fold-below", "action.fold.below")));
         work.setTop(caption);
