@@ -4,10 +4,14 @@ import java.awt.image.BufferedImage;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.List;
+import javafx.scene.control.Label;
+import javafx.scene.control.ListView;
 import javafx.scene.image.Image;
 import javafx.scene.image.PixelFormat;
 import javax.imageio.ImageIO;
 import org.seepledger.desktop.theme.Theme;
+import org.seepledger.intake.LooseValley;
 
 /** Writes pictures of each view, light and dark, in two sizes, into the folder given. */
 public final class Screenshots {
@@ -27,6 +31,7 @@ public final class Screenshots {
                 String suffix = "-" + size[0] + "x" + size[1] + ".png";
                 window.await(() -> !window.assembly().welcome().samples().isEmpty());
                 both(window, folder, "welcome", suffix);
+                looseFiles(window, folder, suffix);
                 window.openSet(Path.of("sample-aquifers/valley"));
                 window.settle();
                 window.settle();
@@ -49,6 +54,20 @@ public final class Screenshots {
             }
         }
         System.exit(0);
+    }
+
+    /** The import assistant with the valley's files as a stranger would have them. */
+    private static void looseFiles(OpenWindow window, Path folder, String suffix) throws IOException {
+        Path loose = Files.createTempDirectory("loose").resolve("valley");
+        LooseValley.scatter(loose);
+        window.robot.interact(() -> window.assembly().intake().bring(List.of(loose)));
+        window.await(
+                () -> window.robot.lookup("#intake-verdict").queryAs(Label.class).getText().contains("way"));
+        ListView<?> items = window.robot.lookup("#intake-items").queryAs(ListView.class);
+        window.robot.interact(() -> items.getSelectionModel().select(8));
+        window.settle();
+        both(window, folder, "loose-files", suffix);
+        window.robot.interact(() -> window.assembly().intake().shown().set(false));
     }
 
     private static void both(OpenWindow window, Path folder, String name, String suffix) throws IOException {
