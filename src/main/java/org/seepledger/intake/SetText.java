@@ -219,8 +219,9 @@ final class SetText {
         for (Item item : plan.items()) {
             item.uses().stream()
                     .filter(use -> use.role() != Role.NONE && use.guess().confidence() == Guess.Confidence.LOW)
-                    .forEach(use -> findings.accept(
-                            Finding.doubt(item, new Part(item, use).shown() + ": " + use.guess().reason())));
+                    .forEach(use -> findings.accept(Finding.doubt(
+                            item,
+                            new Part(item, use).shown() + ": " + use.guess().reason())));
             if (item instanceof Item.Other other && other.file().kind() == LooseFile.Kind.BROKEN) {
                 findings.accept(Finding.doubt(item, other.file().words() + " Until then it is left out."));
             }
@@ -252,9 +253,10 @@ final class SetText {
         List<Boolean> waterTables = LayerWishes.waterTables(plan, binder.layers());
         boolean elastic = storage.containsKey("specific_storage") || storage.containsKey("storativity");
         if (waterTables.contains(true) && !storage.containsKey("specific_yield")) {
-            findings.accept(Finding.doubt(
-                    Topic.SPECIFIC_YIELD,
-                    "No specific yield is given, which layers with a water table need: change in storage stays unknown."));
+            findings.accept(
+                    Finding.doubt(
+                            Topic.SPECIFIC_YIELD,
+                            "No specific yield is given, which layers with a water table need: change in storage stays unknown."));
         }
         if (waterTables.contains(false) && !elastic) {
             findings.accept(Finding.doubt(

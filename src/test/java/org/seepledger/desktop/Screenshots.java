@@ -61,8 +61,11 @@ public final class Screenshots {
         Path loose = Files.createTempDirectory("loose").resolve("valley");
         LooseValley.scatter(loose);
         window.robot.interact(() -> window.assembly().intake().bring(List.of(loose)));
-        window.await(
-                () -> window.robot.lookup("#intake-verdict").queryAs(Label.class).getText().contains("way"));
+        window.await(() -> window.robot
+                .lookup("#intake-verdict")
+                .queryAs(Label.class)
+                .getText()
+                .contains("way"));
         ListView<?> items = window.robot.lookup("#intake-items").queryAs(ListView.class);
         window.robot.interact(() -> items.getSelectionModel().select(8));
         window.settle();

@@ -229,7 +229,9 @@ public final class IntakeModel {
                 },
                 says -> check.set(new Check(PaneState.READY, Optional.of(says))),
                 fault -> check.set(
-                        isStopped(fault) ? Check.NONE : new Check(PaneState.failed(FaultWords.of(fault)), Optional.empty())));
+                        isStopped(fault)
+                                ? Check.NONE
+                                : new Check(PaneState.failed(FaultWords.of(fault)), Optional.empty())));
     }
 
     private static boolean isStopped(Throwable fault) {
@@ -338,16 +340,20 @@ public final class IntakeModel {
         Path folder = wanted.get();
         made.get()
                 .filter(now -> now.copied().isSound())
-                .ifPresent(now -> write(Words.of("intake.writing", folder), folder, (threads, progress) ->
-                        IntakeJob.write(now.copied(), folder, threads, progress)));
+                .ifPresent(now -> write(
+                        Words.of("intake.writing", folder),
+                        folder,
+                        (threads, progress) -> IntakeJob.write(now.copied(), folder, threads, progress)));
     }
 
     /** Writes the description of files where they lie, and opens their folder. */
     void describe() {
         made.get().filter(now -> now.placed().isSound()).ifPresent(now -> {
             Path root = now.plan().root();
-            write(Words.of("intake.writing", root), root, (threads, progress) ->
-                    IntakeJob.describe(now.placed(), root, threads, progress));
+            write(
+                    Words.of("intake.writing", root),
+                    root,
+                    (threads, progress) -> IntakeJob.describe(now.placed(), root, threads, progress));
         });
     }
 
@@ -365,8 +371,7 @@ public final class IntakeModel {
                     shown.set(false);
                     open.accept(done);
                 },
-                fault -> written.set(
-                        isStopped(fault) ? PaneState.READY : PaneState.failed(FaultWords.of(fault))));
+                fault -> written.set(isStopped(fault) ? PaneState.READY : PaneState.failed(FaultWords.of(fault))));
     }
 
     /** Ends the writing; nothing is left of it. */

@@ -144,8 +144,8 @@ final class OutcomePane extends VBox {
                 .get()
                 .says()
                 .ifPresent(says -> says.warnings()
-                        .forEach(words -> all.add(
-                                new Finding(Finding.Level.DOUBT, Optional.empty(), Optional.empty(), words))));
+                        .forEach(words ->
+                                all.add(new Finding(Finding.Level.DOUBT, Optional.empty(), Optional.empty(), words))));
         return all;
     }
 

@@ -61,7 +61,8 @@ class IntakeModelTest {
                 .extracting(ItemRow::title)
                 .containsExactly("The set as a whole", "K.tif", "bottom.tif", "head.tif", "top.tif");
         assertThat(model.check().get().says()).isPresent();
-        assertThat(model.target().get()).isEqualTo(folder.resolve("loose-aquifer").toString());
+        assertThat(model.target().get())
+                .isEqualTo(folder.resolve("loose-aquifer").toString());
         model.write();
         assertThat(opened).containsExactly(folder.resolve("loose-aquifer"));
         assertThat(model.shown().get()).isFalse();
