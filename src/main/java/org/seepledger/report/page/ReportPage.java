@@ -11,20 +11,11 @@ import static j2html.TagCreator.html;
 import static j2html.TagCreator.main;
 import static j2html.TagCreator.meta;
 import static j2html.TagCreator.p;
-import static j2html.TagCreator.rawHtml;
-import static j2html.TagCreator.style;
-import static j2html.TagCreator.title;
 
-import j2html.TagCreator;
 import j2html.tags.DomContent;
 import j2html.tags.specialized.HeadTag;
-import java.io.IOException;
-import java.io.InputStream;
-import java.io.UncheckedIOException;
-import java.nio.charset.StandardCharsets;
 import java.util.stream.IntStream;
 import org.seepledger.ledger.Disclaimer;
-import org.seepledger.report.InkStyle;
 
 /** Writes a report as one HTML page (the HTML standard of WHATWG) that needs nothing but itself. */
 public final class ReportPage {
@@ -52,17 +43,11 @@ public final class ReportPage {
     }
 
     private static HeadTag head(Report report) {
-        String name = report.masthead().title();
-        HeadTag head = TagCreator.head(
-                meta().withCharset("utf-8"),
-                title(name),
-                meta().withName("viewport").withContent("width=device-width, initial-scale=1"),
-                meta().withName("color-scheme").withContent("light dark"),
-                meta().withName("generator").withContent("Seepledger " + report.version()));
+        HeadTag head = PageHead.of(report.masthead().title(), report.version());
         report.masthead()
                 .author()
                 .ifPresent(author -> head.with(meta().withName("author").withContent(author)));
-        return head.with(style(rawHtml(InkStyle.css() + sheet() + PageFooter.css(name))));
+        return head;
     }
 
     private static DomContent content(Report report) {
@@ -80,13 +65,5 @@ public final class ReportPage {
 
     private static DomContent disclaimer() {
         return each(Disclaimer.sentences(), sentence -> p(sentence));
-    }
-
-    private static String sheet() {
-        try (InputStream sheet = ReportPage.class.getResourceAsStream("page.css")) {
-            return new String(sheet.readAllBytes(), StandardCharsets.UTF_8);
-        } catch (IOException e) {
-            throw new UncheckedIOException(e);
-        }
     }
 }
