@@ -384,12 +384,13 @@ final class BenchAuthor {
         private boolean coefficient() {
             for (Row row : area.rows) {
                 if (row.storage) {
-                    double ratio = 0;
+                    double full = 0;
+                    double own = 0;
                     for (int p = 0; p < unit.length; p++) {
-                        double full = sum(budget(prism, p, Optional.of(Aspect.FULL_LAYERS)));
-                        double own = sum(budget(prism, p, Optional.empty()));
-                        ratio = Math.max(ratio, Math.abs(full / own));
+                        full += Math.abs(sum(budget(prism, p, Optional.of(Aspect.FULL_LAYERS))));
+                        own += Math.abs(sum(budget(prism, p, Optional.empty())));
                     }
+                    double ratio = full / own;
                     if (ratio <= 0 || ratio > 0.2 || share(row) < 0.03 && !row.label.startsWith("elastic")) {
                         return false;
                     }

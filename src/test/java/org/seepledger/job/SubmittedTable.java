@@ -223,7 +223,12 @@ final class SubmittedTable {
 
     private void termsAcross() {
         List<String> head = new ArrayList<>(List.of("Zone", "Period"));
-        List<Row> first = signed(areas.get(0));
+        List<Row> first = new ArrayList<>();
+        for (Area area : areas) {
+            signed(area).stream()
+                    .filter(row -> first.stream().noneMatch(other -> other.label.equals(row.label)))
+                    .forEach(first::add);
+        }
         first.forEach(row -> head.add(row.label + " [" + unit + "]"));
         line(head);
         for (Area area : areas) {

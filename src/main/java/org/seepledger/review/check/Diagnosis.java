@@ -1,17 +1,15 @@
 package org.seepledger.review.check;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
-import java.util.TreeSet;
-import java.util.stream.Stream;
-import org.seepledger.ledger.Entry;
-import org.seepledger.ledger.Group;
 import org.seepledger.review.check.KnownRatios.Ratio;
 import org.seepledger.review.check.Recomputed.Aspect;
 import org.seepledger.review.check.Recomputed.Variant;
+import org.seepledger.review.check.Selection.Way;
 import org.seepledger.review.mapping.Catalogue;
 import org.seepledger.review.mapping.Sense;
 import org.seepledger.unit.Figures;
@@ -20,6 +18,7 @@ import org.seepledger.unit.Figures;
 final class Diagnosis {
 
     private static final double MOST = 0.8;
+    private static final double FEW = 0.3;
 
     private final String prism;
     private final double tolerance;
@@ -49,61 +48,68 @@ final class Diagnosis {
     }
 
     private void run() {
-        if (!bad().isEmpty()) {
+        if (!bad(series).isEmpty()) {
             allowVariant(Aspect.WHOLE_CELLS, Code.WHOLE_CELLS);
             allowVariant(Aspect.WELLS_SPREAD, Code.WELLS_SPREAD);
         }
         noteNet();
-        if (bad().isEmpty()) {
-            missing(bad());
-            return;
+        boolean explained = !bad(series).isEmpty()
+                && (units() || variant(Aspect.PERIOD, Code.PERIOD) || variant(Aspect.AREA, Code.AREA));
+        if (!explained) {
+            each();
         }
-        if (units() || variant(Aspect.PERIOD, Code.PERIOD) || variant(Aspect.AREA, Code.AREA)) {
-            return;
-        }
-        Set<Series> left = new LinkedHashSet<>(bad());
+    }
+
+    /** Each term by itself. */
+    private void each() {
+        Set<Series> left = new LinkedHashSet<>(bad(series));
         left.removeAll(thickness());
         left.removeAll(exchanged(left));
         left.removeIf(one -> slips.of(one).map(findings::add).isPresent());
-        left.removeAll(missing(List.copyOf(left)));
+        Coverage coverage = new Coverage(series, List.copyOf(left), tolerance, slips);
+        findings.addAll(coverage.findings());
+        left.removeAll(coverage.explained());
         rest(List.copyOf(left));
     }
 
-    private List<Series> bad() {
-        return series.stream().filter(one -> !one.agrees(tolerance)).toList();
+    /** The terms that differ; one whose in and out are both too small by the same was netted, and does not. */
+    private static List<Series> bad(List<Series> among) {
+        return among.stream().filter(one -> !one.agrees() && !netted(one, among)).toList();
     }
 
-    private static List<Series> bad(List<Series> among, double tolerance) {
-        return among.stream().filter(one -> !one.agrees(tolerance)).toList();
+    private static boolean netted(Series one, List<Series> among) {
+        Sense other = one.sense() == Sense.IN ? Sense.OUT : Sense.IN;
+        boolean oneWay = one.sense() == Sense.IN || one.sense() == Sense.OUT;
+        return oneWay
+                && among.stream()
+                        .filter(two -> two.sense() == other && two.selection().equals(one.selection()))
+                        .anyMatch(one::isNettedWith);
     }
 
     /** Another way of working that others hold for sound, if it fits better. */
     private void allowVariant(Aspect aspect, Code code) {
         for (String words : words(aspect)) {
             List<Series> moved = moved(aspect, words);
-            boolean better =
-                    moved.size() == series.size() && bad(moved, tolerance).size() < bad().size();
-            if (better) {
+            int left = bad(moved).size();
+            boolean fits = moved.size() == series.size() && left <= Math.max(1, FEW * series.size());
+            if (fits && left < bad(series).size()) {
                 series = moved;
-                findings.add(Finding.of(
-                        Severity.NOTE,
-                        code,
-                        prism,
-                        Finding.SEVERAL,
-                        Finding.SEVERAL,
-                        "The figures agree better if " + words + "; they were held against that."));
+                note(code, "The figures agree better if " + words + "; they were held against that.");
                 return;
             }
         }
     }
 
+    private void note(Code code, String words) {
+        findings.add(Finding.of(Severity.NOTE, code, prism, Finding.SEVERAL, Finding.SEVERAL, words));
+    }
+
     private Set<String> words(Aspect aspect) {
         Set<String> words = new LinkedHashSet<>();
-        series.forEach(one -> one.points()
-                .forEach(point -> point.source().variants().stream()
-                        .filter(variant -> variant.aspect() == aspect)
-                        .map(Variant::words)
-                        .forEach(words::add)));
+        series.forEach(one -> one.points().forEach(point -> point.source().variants().stream()
+                .filter(variant -> variant.aspect() == aspect)
+                .map(Variant::words)
+                .forEach(words::add)));
         return words;
     }
 
@@ -116,53 +122,58 @@ final class Diagnosis {
 
     private void noteNet() {
         List<String> netted = series.stream()
-                .filter(one -> one.way() != Selection.Way.GROSS && one.agrees(tolerance))
-                .filter(one -> !one.counted(Selection.Way.GROSS).agrees(tolerance))
+                .filter(one -> one.agrees() && one.way() != Way.GROSS || !one.agrees() && netted(one, series))
                 .map(Series::quoted)
+                .distinct()
                 .toList();
         if (!netted.isEmpty()) {
-            findings.add(Finding.of(
-                    Severity.NOTE,
+            note(
                     Code.NET,
-                    prism,
-                    Finding.SEVERAL,
-                    Finding.SEVERAL,
-                    String.join(", ", netted) + " agree as net flow; what flows both ways through a face is larger."));
+                    String.join(", ", netted)
+                            + (netted.size() == 1 ? " agrees" : " agree")
+                            + " as net flow; what flows both ways through a face is larger.");
         }
     }
 
     /** One factor for all terms. */
     private boolean units() {
-        List<Point> points =
-                series.stream().flatMap(one -> one.points().stream()).toList();
-        Series first = series.get(0);
-        Series all = new Series(
-                prism, List.of("all terms"), first.selection(), first.sense(), first.amount(), first.way(), points);
-        Optional<Ratio> ratio = slips.ratio(all, point -> 1)
-                .or(() -> slips.ratio(all, point -> point.source().days()))
-                .or(() -> slips.ratio(all, point -> 1 / point.source().days()));
-        long telling = series.stream().filter(one -> !one.agrees(tolerance)).count();
-        if (ratio.isEmpty() || telling < Math.max(2, MOST * significant())) {
-            return false;
+        for (Way way : List.of(Way.GROSS, Way.NET_BY_ACCOUNT, Way.NET_BY_ITEM)) {
+            Series all = all(way);
+            Optional<Ratio> ratio = slips.ratio(all, point -> 1)
+                    .or(() -> slips.ratio(all, point -> point.source().days()))
+                    .or(() -> slips.ratio(all, point -> 1 / point.source().days()));
+            if (ratio.isPresent() && bad(series).size() >= Math.max(2, MOST * significant())) {
+                Finding found = slips.finding(
+                        Severity.FAULT,
+                        Code.UNITS,
+                        all,
+                        "All terms are off by the same factor, "
+                                + Figures.shown(ratio.get().value()) + ": that is the ratio of "
+                                + ratio.get().words() + ".");
+                findings.add(found.about(Finding.SEVERAL));
+                return true;
+            }
         }
-        Finding found = slips.finding(
-                Severity.FAULT,
-                Code.UNITS,
-                all,
-                "All terms are off by the same factor, "
-                        + Figures.shown(ratio.get().value()) + ": that is the ratio of "
-                        + ratio.get().words() + ".");
-        findings.add(new Finding(
-                found.severity(),
-                found.code(),
+        return false;
+    }
+
+    /** All terms as if they were one. */
+    private Series all(Way way) {
+        List<Point> points = series.stream()
+                .map(one -> one.counted(way))
+                .flatMap(one -> one.points().stream())
+                .toList();
+        Series first = series.get(0);
+        return new Series(
                 prism,
-                found.period(),
-                Finding.SEVERAL,
-                found.submitted(),
-                found.recomputed(),
-                found.unit(),
-                found.message()));
-        return true;
+                List.of("all terms"),
+                first.selection(),
+                first.sense(),
+                first.amount(),
+                first.both(),
+                tolerance,
+                way,
+                points);
     }
 
     private long significant() {
@@ -175,16 +186,17 @@ final class Diagnosis {
 
     /** Numbers of another period or area: all terms agree with them. */
     private boolean variant(Aspect aspect, Code code) {
+        Set<String> differing = new LinkedHashSet<>();
+        bad(series).forEach(one -> differing.add(one.quoted()));
         for (String words : words(aspect)) {
             List<Series> moved = moved(aspect, words);
             long were = moved.stream()
-                    .filter(one -> series.stream()
-                            .anyMatch(own -> own.terms().equals(one.terms())
-                                    && own.sense() == one.sense()
-                                    && !own.agrees(tolerance)))
+                    .map(Series::quoted)
+                    .distinct()
+                    .filter(differing::contains)
                     .count();
             boolean most = moved.size() >= 2 && moved.size() >= 0.5 * series.size();
-            if (most && were >= 2 && bad(moved, tolerance).isEmpty()) {
+            if (most && were >= 2 && bad(moved).isEmpty()) {
                 findings.add(Finding.of(
                         Severity.FAULT,
                         code,
@@ -201,29 +213,35 @@ final class Diagnosis {
     /** Flow through sides that agrees, all of it, once layers are full. */
     private List<Series> thickness() {
         List<Series> sides = series.stream().filter(Series::sides).toList();
-        List<Series> bad = bad(sides, tolerance);
+        List<Series> bad = bad(sides);
         for (String words : words(Aspect.FULL_LAYERS)) {
-            boolean all = !bad.isEmpty()
-                    && sides.stream()
-                            .allMatch(one -> one.against(Aspect.FULL_LAYERS, words)
-                                    .filter(moved -> moved.agrees(tolerance))
-                                    .isPresent())
-                    && bad.stream()
-                            .anyMatch(one -> fitsBetter(
-                                    one, one.against(Aspect.FULL_LAYERS, words).orElseThrow()));
-            if (all) {
-                bad.forEach(
-                        one -> findings.add(
-                                slips.finding(
-                                        slips.weight(one),
-                                        Code.THICKNESS,
-                                        one,
-                                        one.quoted()
-                                                + " is what flows through layers that are full; where there is a water table, only the saturated part counts.")));
+            List<Series> full = sides.stream()
+                    .map(one -> one.against(Aspect.FULL_LAYERS, words))
+                    .flatMap(Optional::stream)
+                    .toList();
+            boolean all = !bad.isEmpty() && full.size() == sides.size() && bad(full).isEmpty();
+            if (all && largest(full) < 0.3 * largest(sides)) {
+                bad.forEach(one -> findings.add(slips.finding(
+                        slips.weight(one),
+                        Code.THICKNESS,
+                        one,
+                        one.quoted() + " is what flows through layers that are full; where there is a water table,"
+                                + " only the saturated part counts.")));
                 return bad;
             }
         }
         return List.of();
+    }
+
+    private static double largest(List<Series> among) {
+        return bad(among).stream()
+                .mapToDouble(Series::worstShare)
+                .max()
+                .orElseGet(() -> among.stream()
+                        .filter(Series::agrees)
+                        .mapToDouble(Series::worstShare)
+                        .max()
+                        .orElse(0));
     }
 
     /** In and out of a term that have each other's numbers. */
@@ -235,11 +253,10 @@ final class Diagnosis {
                         && out.sense() == Sense.OUT
                         && in.selection().equals(out.selection())
                         && in.points().size() == out.points().size();
-                if (pair && in.hasThatOf(out, tolerance) && out.hasThatOf(in, tolerance)) {
+                if (pair && in.hasThatOf(out) && out.hasThatOf(in)) {
                     Code code = in.storage() ? Code.STORAGE_TURNED : Code.SIGN;
-                    String words = in.storage()
-                            ? ": release and uptake are exchanged."
-                            : ": inflow and outflow are exchanged.";
+                    String words =
+                            in.storage() ? ": release and uptake are exchanged." : ": inflow and outflow are exchanged.";
                     findings.add(slips.finding(Severity.FAULT, code, in, in.quoted() + words));
                     found.add(in);
                     found.add(out);
@@ -249,216 +266,36 @@ final class Diagnosis {
         return found;
     }
 
-    private boolean fitsBetter(Series own, Series moved) {
-        return moved.worstShare() < 0.3 * own.worstShare();
-    }
-
-    /** Items that no term stands for; a term that agrees once it takes one in was grouped. */
-    private List<Series> missing(List<Series> unexplained) {
-        List<Series> explained = new ArrayList<>();
-        Set<String> absent = uncovered();
-        if (absent.isEmpty() || series.size() < 2) {
-            return explained;
-        }
-        for (Series one : unexplained) {
-            Optional<Series> found = takingIn(one, absent);
-            if (found.isPresent()) {
-                Set<String> taken = new TreeSet<>(found.get().selection().items());
-                taken.removeAll(one.selection().items());
-                absent.removeAll(taken);
-                explained.add(one);
-                findings.add(grouped(one, taken));
-            }
-        }
-        absent.forEach(this::reportMissing);
-        return explained;
-    }
-
-    /** A term with one of the absent items, or all of them, if it then agrees. */
-    private Optional<Series> takingIn(Series one, Set<String> absent) {
-        Selection all = one.selection();
-        for (String key : absent) {
-            all = all.and(key);
-        }
-        Stream<Selection> each = absent.stream().map(one.selection()::and);
-        return Stream.concat(each, Stream.of(all))
-                .map(one::with)
-                .filter(with -> with.agrees(tolerance))
-                .findFirst();
-    }
-
-    private Finding grouped(Series one, Set<String> taken) {
-        String group = one.selection().items().iterator().next().replaceFirst("/.*", "");
-        boolean alike = taken.stream().allMatch(key -> key.startsWith(group));
-        String words = one.quoted() + " agrees if it includes " + String.join(", ", names(taken)) + ".";
-        return slips.finding(alike ? Severity.NOTE : Severity.DOUBT, Code.GROUPED, one, words);
-    }
-
-    private static List<String> names(Set<String> keys) {
-        return keys.stream()
-                .map(key -> "\"" + key.replaceFirst("^[a-z]+/", "") + "\"")
-                .toList();
-    }
-
-    /** Items with something in them that no term of the table stands for. */
-    private Set<String> uncovered() {
-        Set<String> absent = new TreeSet<>();
-        for (Point point : series.stream().flatMap(one -> one.points().stream()).toList()) {
-            for (Entry entry : point.basis().entries()) {
-                boolean covered = !entry.account().quantified()
-                        || series.stream().anyMatch(one -> one.selection().takes(entry.account()));
-                if (!covered && share(point, Selection.key(entry.account())) > tolerance) {
-                    absent.add(Selection.key(entry.account()));
-                }
-            }
-        }
-        return absent;
-    }
-
-    private static double share(Point point, String key) {
-        Selection selection = new Selection(Set.of(key), Set.of(), -1);
-        double in = selection.of(point.basis(), Selection.Way.GROSS, Sense.IN);
-        double out = selection.of(point.basis(), Selection.Way.GROSS, Sense.OUT);
-        return Math.max(in, out) * point.source().cubicMetres() / Math.max(point.throughput(), 1e-300);
-    }
-
-    private void reportMissing(String key) {
-        Selection selection = new Selection(Set.of(key), Set.of(), -1);
-        Point most = series.stream()
-                .flatMap(one -> one.points().stream())
-                .max(java.util.Comparator.comparingDouble(point -> share(point, key)))
-                .orElseThrow();
-        double net = selection.of(most.basis(), Selection.Way.NET, Sense.NET)
-                * most.source().cubicMetres()
-                / most.unit();
-        boolean partly =
-                key.startsWith(Group.SIDE.toString()) && series.stream().noneMatch(Series::faces);
-        Severity severity = partly || share(most, key) <= 5 * tolerance ? Severity.DOUBT : Severity.FAULT;
-        String name = key.replaceFirst("^[a-z]+/", "");
-        findings.add(new Finding(
-                severity,
-                Code.MISSING,
-                prism,
-                most.when().label(),
-                name,
-                Double.NaN,
-                net,
-                most.figures().get(0).unit(),
-                "No term of the table is tied to \"" + name + "\", " + Figures.percent(100 * share(most, key))
-                        + " of throughput in " + most.when().label() + "."));
-    }
-
     /** What no slip explains. */
     private void rest(List<Series> left) {
         if (left.isEmpty()) {
             return;
         }
-        boolean closes = closes();
-        if (closes && oneTerm(left) && !recomputedCloses()) {
-            findings.add(
-                    slips.finding(
-                            slips.weight(left.get(0)),
-                            Code.RESIDUAL_BOOKED,
-                            left.get(0),
-                            left.get(0).quoted()
-                                    + " alone differs, and the budget then closes, though the recomputed one does not: the residual may be booked into it."));
-            return;
-        }
-        if (left.size() > 1 && cancel(left)) {
-            Severity weight = left.stream()
-                    .map(slips::weight)
-                    .min(java.util.Comparator.naturalOrder())
-                    .orElseThrow();
-            findings.add(
-                    slips.finding(
-                            weight,
-                            Code.COMPENSATING,
-                            joined(left),
-                            String.join(", ", left.stream().map(Series::quoted).toList())
-                                    + " differ by amounts that cancel: the budget closes all the same, and closure tells nothing of them."));
-            return;
-        }
-        left.forEach(one -> findings.add(slips.area(one)
-                .orElseGet(() -> slips.finding(
-                        slips.weight(one),
-                        Code.DIFFERENCE,
-                        one,
-                        one.quoted() + " differs by up to " + Figures.percent(100 * one.worstShare())
-                                + " of throughput."))));
-    }
-
-    private static Series joined(List<Series> left) {
+        Closing whole = new Closing(series, tolerance);
+        boolean oneTerm = left.stream().map(Series::selection).distinct().count() == 1;
         Series first = left.get(0);
-        List<String> terms =
-                left.stream().flatMap(one -> one.terms().stream()).distinct().toList();
-        return new Series(
-                first.prism(), terms, first.selection(), first.sense(), first.amount(), first.way(), first.points());
-    }
-
-    /** One series, or in and out of the same term. */
-    private static boolean oneTerm(List<Series> left) {
-        return left.stream().map(Series::selection).distinct().count() == 1;
-    }
-
-    private static double signed(Series one, double value) {
-        return one.sense() == Sense.OUT || one.sense() == Sense.LOSS ? -value : value;
-    }
-
-    private boolean closes() {
-        return periods().allMatch(index -> {
-            double sum = 0;
-            double half = 0;
-            for (Series one : counted()) {
-                sum += signed(one, one.points().get(index).submitted());
-                half += one.points().get(index).half();
-            }
-            return Math.abs(sum) <= half + 0.1 * tolerance * throughput(index);
-        });
-    }
-
-    private boolean recomputedCloses() {
-        return periods().allMatch(index -> {
-            Point point = series.get(0).points().get(index);
-            double residual = point.basis().totals().residual() * point.source().cubicMetres();
-            return Math.abs(residual) <= 0.5 * tolerance * point.throughput();
-        });
-    }
-
-    private boolean cancel(List<Series> left) {
-        List<Series> terms =
-                left.stream().filter(one -> counted().contains(one)).toList();
-        return terms.size() > 1
-                && periods().allMatch(index -> {
-                    double sum = 0;
-                    double size = 0;
-                    for (Series one : terms) {
-                        sum += signed(one, one.points().get(index).off());
-                        size += Math.abs(one.points().get(index).off());
-                    }
-                    return Math.abs(sum) <= Math.max(0.2 * size, tolerance * throughput(index));
-                });
-    }
-
-    /** The terms to add up: in and out where a term has both, else net; only where all have the same periods. */
-    private List<Series> counted() {
-        return series.stream()
-                .filter(one -> one.sense() == Sense.IN
-                        || one.sense() == Sense.OUT
-                        || series.stream()
-                                .noneMatch(other -> other != one
-                                        && other.selection().equals(one.selection())
-                                        && (other.sense() == Sense.IN || other.sense() == Sense.OUT)))
-                .toList();
-    }
-
-    private double throughput(int index) {
-        return series.get(0).points().get(index).throughput();
-    }
-
-    /** The periods, where all terms have the same number of them; else just none. */
-    private java.util.stream.IntStream periods() {
-        int count = series.get(0).points().size();
-        boolean same = series.stream().allMatch(one -> one.points().size() == count);
-        return java.util.stream.IntStream.range(0, same ? count : 1);
+        if (oneTerm && whole.closes() && !whole.recomputedCloses()) {
+            findings.add(slips.finding(
+                    slips.weight(first),
+                    Code.RESIDUAL_BOOKED,
+                    first,
+                    first.quoted() + " alone differs, and the budget then closes, though the recomputed one does not:"
+                            + " the residual may be booked into it."));
+        } else if (!oneTerm && new Closing(left, tolerance).cancels()) {
+            String names =
+                    String.join(", ", left.stream().map(Series::quoted).distinct().toList());
+            Series worst = left.stream()
+                    .max(Comparator.comparingDouble(Series::worstShare))
+                    .orElseThrow();
+            findings.add(slips.finding(
+                            slips.weight(worst),
+                            Code.COMPENSATING,
+                            worst,
+                            names + " differ by amounts that cancel: the budget closes all the same, and closure tells"
+                                    + " nothing of them.")
+                    .about(String.join(" + ", left.stream().map(Series::term).distinct().toList())));
+        } else {
+            left.forEach(one -> findings.add(slips.area(one).orElseGet(() -> slips.difference(one))));
+        }
     }
 }

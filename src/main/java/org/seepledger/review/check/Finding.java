@@ -47,6 +47,11 @@ public record Finding(
         return new Finding(severity, code, prism, period, item, Double.NaN, Double.NaN, "", message);
     }
 
+    /** The same of another term. */
+    Finding about(String other) {
+        return new Finding(severity, code, prism, period, other, submitted, recomputed, unit, message);
+    }
+
     /** {@return submitted ÷ recomputed; NaN where there is none} */
     public double ratio() {
         double ratio = submitted / recomputed;

@@ -1,7 +1,6 @@
 package org.seepledger.review.check;
 
 import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -23,9 +22,11 @@ final class Pairing {
     private final Map<String, String> areas;
     private final Reference reference;
     private final Rounding rounding;
+    private final double tolerance;
     private final Amount assumed;
 
-    private Pairing(List<Figure> figures, Map<String, String> areas, Reference reference, Rounding rounding) {
+    private Pairing(List<Figure> figures, Map<String, String> areas, Reference reference, Rounding rounding, double tolerance) {
+        this.tolerance = tolerance;
         this.figures = figures.stream()
                 .filter(figure -> !Double.isNaN(figure.value()) && tied(figure) && areas.containsKey(figure.area()))
                 .toList();
@@ -49,9 +50,11 @@ final class Pairing {
      * @param areas which prisms its areas are
      * @param reference what it is held against
      * @param rounding how far it was rounded
+     * @param tolerance share of throughput within which figures agree
      */
-    static List<Series> of(List<Figure> figures, Map<String, String> areas, Reference reference, Rounding rounding) {
-        Pairing pairing = new Pairing(figures, areas, reference, rounding);
+    static List<Series> of(
+            List<Figure> figures, Map<String, String> areas, Reference reference, Rounding rounding, double tolerance) {
+        Pairing pairing = new Pairing(figures, areas, reference, rounding, tolerance);
         Map<Term, Map<When, List<Figure>>> terms = new LinkedHashMap<>();
         for (Figure figure : pairing.figures) {
             Term term = new Term(
@@ -103,29 +106,19 @@ final class Pairing {
         if (points.isEmpty()) {
             return Optional.empty();
         }
-        Series gross = new Series(
-                term.prism(), List.copyOf(labels), term.selection(), term.sense(), term.amount(), Way.GROSS, points);
-        return Optional.of(term.sense() == Sense.NET || term.sense() == Sense.LOSS ? gross : counted(gross, term, all));
-    }
-
-    /** Gross unless another way of counting comes nearer. */
-    private static Series counted(Series gross, Term term, Set<Term> all) {
-        Sense other = gross.sense() == Sense.IN ? Sense.OUT : Sense.IN;
+        Sense other = term.sense() == Sense.IN ? Sense.OUT : Sense.IN;
         boolean both = all.contains(new Term(term.prism(), term.selection(), other, term.amount()));
-        List<Way> ways = new ArrayList<>(List.of(Way.GROSS, Way.NET_BY_ACCOUNT, Way.NET_BY_ITEM));
-        if (!both) {
-            ways.add(Way.NET);
-        }
-        return ways.stream()
-                .map(gross::counted)
-                .min(Comparator.comparingDouble(Pairing::distance))
-                .orElseThrow();
-    }
-
-    private static double distance(Series series) {
-        return series.points().stream()
-                .mapToDouble(point -> Math.abs(Math.abs(point.submitted()) - Math.abs(point.recomputed())))
-                .sum();
+        Series gross = new Series(
+                term.prism(),
+                List.copyOf(labels),
+                term.selection(),
+                term.sense(),
+                term.amount(),
+                both,
+                tolerance,
+                Way.GROSS,
+                points);
+        return Optional.of(gross.settled());
     }
 
     private Point point(List<Figure> list, Recomputed source, Term term) {

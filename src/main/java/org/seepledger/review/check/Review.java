@@ -74,7 +74,7 @@ public final class Review {
     private void compare(Reference reference) {
         Map<String, String> areas = areas(reference.catalogue());
         List<Figure> settled = StorageSense.settled(figures);
-        List<Series> all = Pairing.of(settled, areas, reference, Rounding.of(figures));
+        List<Series> all = Pairing.of(settled, areas, reference, Rounding.of(figures), tolerance);
         Map<List<Object>, List<Series>> budgets = all.stream()
                 .collect(Collectors.groupingBy(
                         one -> List.of(one.prism(), one.amount()), LinkedHashMap::new, Collectors.toList()));

@@ -11,7 +11,7 @@ import org.seepledger.review.mapping.Figure;
 final class Rounding {
 
     private static final int FIGURES_NEEDED = 6;
-    private static final int MOST_DIGITS = 4;
+    private static final int MOST_DIGITS = 7;
 
     private final double step;
     private final int digits;

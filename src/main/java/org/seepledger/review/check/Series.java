@@ -20,6 +20,8 @@ import org.seepledger.review.sheet.Amount;
  * @param selection what it stands for
  * @param sense which way it counts
  * @param amount whether it is given as rates or volumes
+ * @param both whether the table gives both ways of it
+ * @param tolerance share of throughput within which figures agree
  * @param way how flow both ways is counted
  * @param points its periods
  */
@@ -29,6 +31,8 @@ record Series(
         Selection selection,
         Sense sense,
         Amount amount,
+        boolean both,
+        double tolerance,
         Way way,
         List<Point> points) {
 
@@ -39,12 +43,8 @@ record Series(
         return String.join(" + ", terms);
     }
 
-    boolean agrees(double tolerance) {
+    boolean agrees() {
         return points.stream().allMatch(point -> point.agrees(tolerance));
-    }
-
-    long disagreements(double tolerance) {
-        return points.stream().filter(point -> !point.agrees(tolerance)).count();
     }
 
     boolean storage() {
@@ -60,7 +60,7 @@ record Series(
     }
 
     /** Whether what was submitted of it is what was recomputed of another one. */
-    boolean hasThatOf(Series other, double tolerance) {
+    boolean hasThatOf(Series other) {
         return IntStream.range(0, points.size()).allMatch(i -> {
             Point own = points.get(i);
             double allowed = Math.max(own.half(), 0.5 * tolerance * own.throughput());
@@ -68,24 +68,56 @@ record Series(
         });
     }
 
+    /** Whether it and the other way of the same term are too small by the same. */
+    boolean isNettedWith(Series other) {
+        boolean same = points.size() == other.points().size();
+        return same && IntStream.range(0, points.size()).allMatch(i -> {
+            Point own = points.get(i);
+            Point two = other.points().get(i);
+            double allowed = Math.max(own.half() + two.half(), tolerance * own.throughput());
+            return own.off() <= allowed && Math.abs(own.off() - two.off()) <= allowed;
+        });
+    }
+
+    /** The ways of counting that a table may have gone by. */
+    List<Way> ways() {
+        if (sense == Sense.NET || sense == Sense.LOSS) {
+            return List.of(Way.GROSS);
+        }
+        return both
+                ? List.of(Way.GROSS, Way.NET_BY_ACCOUNT, Way.NET_BY_ITEM)
+                : List.of(Way.GROSS, Way.NET_BY_ACCOUNT, Way.NET_BY_ITEM, Way.NET);
+    }
+
     Series counted(Way other) {
         return with(selection, other, Point::basis);
     }
 
-    Series with(Selection other) {
-        return with(other, way, Point::basis);
+    /** The first way of counting by which all sizes agree, else gross. */
+    Series settled() {
+        return ways().stream()
+                .map(this::counted)
+                .filter(Series::sizesAgree)
+                .findFirst()
+                .orElseGet(() -> counted(Way.GROSS));
     }
 
-    /** The same beside other budgets. */
-    Series against(Function<Point, PeriodBudget> budget) {
-        return with(selection, way, budget);
+    private boolean sizesAgree() {
+        return points.stream().allMatch(point -> {
+            double off = Math.abs(point.submitted()) - Math.abs(point.recomputed());
+            return Math.abs(off) <= Math.max(point.half(), tolerance * point.throughput());
+        });
+    }
+
+    Series with(Selection other) {
+        return with(other, way, Point::basis).settled();
     }
 
     private Series with(Selection other, Way counted, Function<Point, PeriodBudget> budget) {
         List<Point> moved = points.stream()
                 .map(point -> point.against(budget.apply(point), other, counted, sense))
                 .toList();
-        return new Series(prism, terms, other, sense, amount, counted, moved);
+        return new Series(prism, terms, other, sense, amount, both, tolerance, counted, moved);
     }
 
     /** The same beside a variant; empty where a period has none, or the term stands for nothing in it. */
@@ -93,7 +125,10 @@ record Series(
         boolean all = points.stream()
                 .allMatch(point ->
                         variant(point, aspect, words).filter(selection::any).isPresent());
-        return all ? Optional.of(against(point -> variant(point, aspect, words).orElseThrow())) : Optional.empty();
+        return all
+                ? Optional.of(with(selection, way, point -> variant(point, aspect, words).orElseThrow())
+                        .settled())
+                : Optional.empty();
     }
 
     static Optional<PeriodBudget> variant(Point point, Recomputed.Aspect aspect, String words) {
@@ -121,9 +156,8 @@ record Series(
      *
      * @param factor the factor of a period
      * @param near how near, as a share
-     * @param tolerance share of throughput
      */
-    boolean isTimes(ToDoubleFunction<Point> factor, double near, double tolerance) {
+    boolean isTimes(ToDoubleFunction<Point> factor, double near) {
         List<Point> telling = points.stream()
                 .filter(point -> tells(point, factor.applyAsDouble(point), tolerance))
                 .toList();

@@ -5,6 +5,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.ToDoubleFunction;
+import java.util.stream.Stream;
 import org.seepledger.review.check.KnownRatios.Ratio;
 import org.seepledger.review.mapping.Catalogue;
 import org.seepledger.review.mapping.Sense;
@@ -14,6 +15,7 @@ import org.seepledger.unit.Figures;
 final class Slips {
 
     private static final double SAME = 0.005;
+    private static final double CLOSELY = 0.35;
     private static final double ROUGHLY = 0.7;
     private static final int MOST_WELLS = 80;
 
@@ -27,16 +29,24 @@ final class Slips {
 
     /** The slip with a sure signature that explains a series; empty if none does. */
     Optional<Finding> of(Series series) {
+        return Stream.concat(Stream.of(series), series.ways().stream().map(series::counted))
+                .map(this::sure)
+                .flatMap(Optional::stream)
+                .findFirst();
+    }
+
+    private Optional<Finding> sure(Series series) {
         return turned(series)
                 .or(() -> absent(series))
                 .or(() -> twice(series))
                 .or(() -> well(series))
+                .or(() -> coefficient(series, CLOSELY))
                 .or(() -> unit(series))
-                .or(() -> coefficient(series));
+                .or(() -> coefficient(series, ROUGHLY));
     }
 
     private Optional<Finding> turned(Series series) {
-        if (!series.isTimes(point -> -1, SAME, tolerance)) {
+        if (!series.isTimes(point -> -1, SAME)) {
             return Optional.empty();
         }
         Code code = series.storage() ? Code.STORAGE_TURNED : Code.SIGN;
@@ -57,7 +67,7 @@ final class Slips {
     private Optional<Finding> twice(Series series) {
         boolean repeated =
                 series.points().stream().allMatch(point -> point.figures().size() > 1);
-        if (series.isTimes(point -> 2, SAME, tolerance)) {
+        if (series.isTimes(point -> 2, SAME)) {
             String words =
                     repeated ? " stands twice in the table." : " is twice what it should be: it may be counted twice.";
             return Optional.of(finding(Severity.FAULT, Code.TWICE, series, series.quoted() + words));
@@ -103,7 +113,7 @@ final class Slips {
                 : byPeriod ? Optional.empty() : KnownRatios.nearest(middle);
         double sign = Math.signum(middle);
         return known.filter(ratio -> series.isTimes(
-                point -> sign * ratio.value() * period.applyAsDouble(point), KnownRatios.NEAR, tolerance));
+                point -> sign * ratio.value() * period.applyAsDouble(point), KnownRatios.NEAR));
     }
 
     private List<Double> ratios(Series series, ToDoubleFunction<Point> period) {
@@ -122,7 +132,7 @@ final class Slips {
     }
 
     /** Specific storage where specific yield belongs, or the other way round: roughly, since both vary in space. */
-    private Optional<Finding> coefficient(Series series) {
+    private Optional<Finding> coefficient(Series series, double near) {
         if (!series.storage()) {
             return Optional.empty();
         }
@@ -132,8 +142,8 @@ final class Slips {
             return Optional.empty();
         }
         double log = Math.log(Math.abs(ratios.get(ratios.size() / 2)));
-        boolean less = Math.abs(log - Math.log(expected.get())) < ROUGHLY;
-        boolean more = Math.abs(log + Math.log(expected.get())) < ROUGHLY;
+        boolean less = Math.abs(log - Math.log(expected.get())) < near;
+        boolean more = Math.abs(log + Math.log(expected.get())) < near;
         if (!less && !more) {
             return Optional.empty();
         }
@@ -168,7 +178,7 @@ final class Slips {
                 .allMatch(item -> catalogue.items().stream()
                         .anyMatch(known -> known.key().equals(item) && known.nature() == Catalogue.Nature.AREAL));
         double middle = median(series);
-        boolean same = areal && middle > 0.2 && middle < 5 && series.isTimes(point -> middle, SAME, tolerance);
+        boolean same = areal && middle > 0.2 && middle < 5 && series.isTimes(point -> middle, SAME);
         if (!same) {
             return Optional.empty();
         }
@@ -239,6 +249,11 @@ final class Slips {
                     + (well.counted() ? "left out; it lies inside" : "counted in; it lies outside"));
         }
         return String.join(", and ", parts);
+    }
+
+    Finding difference(Series series) {
+        String words = series.quoted() + " differs by up to " + Figures.percent(100 * series.worstShare()) + " of throughput.";
+        return finding(weight(series), Code.DIFFERENCE, series, words);
     }
 
     /** A difference of a few tolerances is a doubt. */

@@ -59,7 +59,7 @@ public final class ValueTies {
     }
 
     private static boolean agree(List<Figure> figures, Map<String, String> areas, Reference reference) {
-        List<Series> series = Pairing.of(figures, areas, reference, Rounding.of(figures));
+        List<Series> series = Pairing.of(figures, areas, reference, Rounding.of(figures), SAME);
         return !series.isEmpty() && series.stream().allMatch(ValueTies::agrees);
     }
 
