@@ -109,7 +109,7 @@ final class TextTable {
         }
     }
 
-    /** The separator that most lines have outside quotation marks; a comma may be the decimal sign beside another. */
+    /** The separator that lines have outside quotation marks; beside another, a comma is the decimal sign or parts thousands. */
     private static char separator(String text) {
         List<String> lines = text.lines()
                 .filter(line -> !line.isBlank() && !line.startsWith("#"))
@@ -119,22 +119,23 @@ final class TextTable {
             return lines.get(0).charAt(4);
         }
         for (char separator : SEPARATORS) {
-            long with = lines.stream().filter(line -> has(line, separator)).count();
-            if (separator == ',' || with > 0.5 * lines.size()) {
+            long once = lines.stream().filter(line -> count(line, separator) > 0).count();
+            long often =
+                    lines.stream().filter(line -> count(line, separator) > 1).count();
+            if (separator == ',' || often > 1 || once > 0.5 * lines.size()) {
                 return separator;
             }
         }
         return ',';
     }
 
-    private static boolean has(String line, char separator) {
+    private static int count(String line, char separator) {
         boolean quoted = false;
+        int count = 0;
         for (int i = 0; i < line.length(); i++) {
             quoted ^= line.charAt(i) == '"';
-            if (line.charAt(i) == separator && !quoted) {
-                return true;
-            }
+            count += line.charAt(i) == separator && !quoted ? 1 : 0;
         }
-        return false;
+        return count;
     }
 }
