@@ -33,6 +33,7 @@ import picocli.CommandLine.IVersionProvider;
             ExtractCommand.class,
             PlumeCommand.class,
             ReviewCommand.class,
+            CompareCommand.class,
             DesktopCommand.class
         },
         mixinStandardHelpOptions = true,
@@ -112,6 +113,9 @@ public final class Seepledger {
                 }
                 if (type == ReviewCommand.class) {
                     return type.cast(new ReviewCommand(terminal));
+                }
+                if (type == CompareCommand.class) {
+                    return type.cast(new CompareCommand(terminal));
                 }
                 if (type == ExtractCommand.class) {
                     return type.cast(new ExtractCommand(terminal));

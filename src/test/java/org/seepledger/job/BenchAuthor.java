@@ -441,7 +441,7 @@ final class BenchAuthor {
                 if (taken < 0.03 * area.throughput(p)) {
                     return false;
                 }
-                row.out[p] += well.counted() ? -taken : taken;
+                row.out[p] += well.inside() ? -taken : taken;
                 if (row.out[p] < 0.01 * area.throughput(p)) {
                     return false;
                 }

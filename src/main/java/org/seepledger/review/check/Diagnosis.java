@@ -65,6 +65,7 @@ final class Diagnosis {
         Set<Series> left = new LinkedHashSet<>(bad(series));
         left.removeAll(thickness());
         left.removeAll(exchanged(left));
+        left.removeAll(oneTurned(left));
         left.removeIf(one -> slips.of(one).map(findings::add).isPresent());
         Coverage coverage = new Coverage(series, List.copyOf(left), tolerance, slips);
         findings.addAll(coverage.findings());
@@ -261,6 +262,28 @@ final class Diagnosis {
                     found.add(in);
                     found.add(out);
                 }
+            }
+        }
+        return found;
+    }
+
+    /** Terms of several items, one of which counts the wrong way. */
+    private Set<Series> oneTurned(Set<Series> left) {
+        Set<Series> found = new LinkedHashSet<>();
+        for (Series one : left) {
+            List<Series> same = left.stream()
+                    .filter(other -> other.selection().equals(one.selection()))
+                    .toList();
+            if (!found.contains(one) && !one.storage()) {
+                Optional<String> item = TurnedItem.of(same, tolerance);
+                item.ifPresent(name -> {
+                    findings.add(slips.finding(
+                            Severity.FAULT,
+                            Code.SIGN,
+                            one,
+                            one.quoted() + " would agree if \"" + name + "\", which is part of it, counted the other way."));
+                    found.addAll(same);
+                });
             }
         }
         return found;

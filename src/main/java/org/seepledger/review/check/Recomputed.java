@@ -60,10 +60,10 @@ public record Recomputed(
      *
      * @param name its name
      * @param category its category
-     * @param counted whether the prism's budget counts it
+     * @param inside whether it lies inside the prism's outline
      * @param volume what it adds, m³; negative where it takes
      */
-    public record WellVolume(String name, String category, boolean counted, double volume) {}
+    public record WellVolume(String name, String category, boolean inside, double volume) {}
 
     /** The larger of all gains and all losses, m³. */
     double throughput() {

@@ -102,6 +102,15 @@ record Series(
                 .orElseGet(() -> counted(Way.GROSS));
     }
 
+    /** Whether it would agree if it counted the other way. */
+    boolean agreesTurned() {
+        return points.stream().allMatch(point -> {
+            double net = selection.of(point.basis(), Way.NET, sense) * point.source().cubicMetres();
+            double allowed = Math.max(point.half(), tolerance * point.throughput());
+            return Math.abs(point.submitted() + net) <= allowed;
+        });
+    }
+
     private boolean sizesAgree() {
         return points.stream().allMatch(point -> {
             double off = Math.abs(point.submitted()) - Math.abs(point.recomputed());

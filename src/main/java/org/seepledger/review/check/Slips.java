@@ -1,6 +1,5 @@
 package org.seepledger.review.check;
 
-import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
@@ -197,58 +196,14 @@ final class Slips {
                 .allMatch(item -> catalogue.items().stream()
                         .anyMatch(known -> known.key().equals(item) && known.nature() == Catalogue.Nature.WELLS));
         int count = series.points().get(0).source().wells().size();
-        if (!wells || count > MOST_WELLS) {
+        boolean nothing = series.points().stream().allMatch(point -> point.recomputed() == 0);
+        if (!wells || nothing && series.agreesTurned() || count > MOST_WELLS) {
             return Optional.empty();
         }
-        List<List<Integer>> sets = new ArrayList<>();
-        for (int one = 0; one < count; one++) {
-            sets.add(List.of(one));
-        }
-        for (int one = 0; one < count; one++) {
-            for (int other = one + 1; other < count; other++) {
-                sets.add(List.of(one, other));
-            }
-        }
-        return sets.stream()
-                .filter(set -> explains(series, set))
+        return WellSet.upToTwo(count)
+                .filter(set -> set.explains(series))
                 .findFirst()
-                .map(set -> finding(
-                        weight(series),
-                        Code.WELL,
-                        series,
-                        series.quoted() + " would agree if " + names(series, set) + "."));
-    }
-
-    private boolean explains(Series series, List<Integer> set) {
-        boolean any = false;
-        for (Point point : series.points()) {
-            double made = 0;
-            for (int index : set) {
-                Recomputed.WellVolume well = point.source().wells().get(index);
-                if (!series.selection().items().contains("source/" + well.category())) {
-                    return false;
-                }
-                double counts =
-                        series.sense() == Sense.OUT || series.sense() == Sense.LOSS ? -well.volume() : well.volume();
-                made += well.counted() ? -counts : counts;
-            }
-            if (Math.abs(point.off() - made)
-                    > point.half() + 0.01 * Math.abs(made) + 0.1 * tolerance * point.throughput()) {
-                return false;
-            }
-            any |= Math.abs(made) > tolerance * point.throughput();
-        }
-        return any;
-    }
-
-    private static String names(Series series, List<Integer> set) {
-        List<String> parts = new ArrayList<>();
-        for (int index : set) {
-            Recomputed.WellVolume well = series.points().get(0).source().wells().get(index);
-            parts.add("well \"" + well.name() + "\" were "
-                    + (well.counted() ? "left out; it lies inside" : "counted in; it lies outside"));
-        }
-        return String.join(", and ", parts);
+                .map(set -> finding(weight(series), Code.WELL, series, series.quoted() + " " + set.words(series) + "."));
     }
 
     Finding difference(Series series) {

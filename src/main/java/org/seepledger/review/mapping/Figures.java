@@ -57,11 +57,14 @@ public final class Figures {
 
     private Submission read() {
         readTitle();
+        readCorner(mapping.header());
         for (int row = mapping.header() + 1; row < sheet.rows().size(); row++) {
-            if (sheet.isBlank(row) || isHeader(row)) {
+            if (sheet.isBlank(row)) {
                 continue;
             }
-            if (hasFigure(row)) {
+            if (isHeader(sheet, mapping, row)) {
+                readCorner(row);
+            } else if (hasFigure(row)) {
                 readRow(row);
             } else {
                 readHeading(row);
@@ -94,17 +97,29 @@ public final class Figures {
                 .findFirst();
     }
 
-    private boolean isHeader(int row) {
+    /** Whether a row repeats the headings of the figures; what stands over the names may then differ. */
+    static boolean isHeader(Sheet sheet, Mapping mapping, int row) {
         boolean any = false;
-        for (int column = 0; column < columns.size(); column++) {
+        for (int column = 0; column < mapping.columns().size(); column++) {
             String header = sheet.cell(mapping.header(), column);
-            String cell = sheet.cell(row, column);
-            if (!cell.equals(header)) {
+            boolean value = mapping.columns().get(column).role() == Role.VALUE;
+            if (value && !sheet.cell(row, column).equals(header)) {
                 return false;
             }
-            any |= !cell.isEmpty();
+            any |= value && !header.isEmpty();
         }
         return any;
+    }
+
+    /** The heading over the names may be that of an area. */
+    private void readCorner(int row) {
+        int term = index(Role.TERM);
+        String corner = term < 0 ? "" : sheet.cell(row, term);
+        boolean named = row > mapping.header() && !corner.equals(sheet.cell(mapping.header(), term));
+        prism(corner).or(() -> named ? Optional.of(corner) : Optional.empty()).ifPresent(found -> {
+            area = found;
+            section = Optional.empty();
+        });
     }
 
     private boolean hasFigure(int row) {

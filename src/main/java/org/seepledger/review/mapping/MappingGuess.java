@@ -55,14 +55,16 @@ public final class MappingGuess {
             columns.add(column(header, column));
         }
         settleLabels(columns, header.row());
-        return new Mapping(
+        Mapping read = new Mapping(
                 header.row(),
                 Optional.of(numerals.decimal()),
                 titleUnit(columns, header.row()),
                 columns,
-                ties(columns, header.row()),
+                Map.of(),
                 areas(columns, header.row()),
                 Map.of());
+        return new Mapping(
+                read.header(), read.decimal(), read.unit(), columns, ties(read), read.areas(), read.periods());
     }
 
     private Column column(HeaderSearch.Header header, int index) {
@@ -232,7 +234,8 @@ public final class MappingGuess {
                 .orElse("");
     }
 
-    private Map<String, Tie> ties(List<Column> columns, int header) {
+    private Map<String, Tie> ties(Mapping read) {
+        List<Column> columns = read.columns();
         Map<String, Tie> ties = new LinkedHashMap<>();
         int group = index(columns, Role.GROUP);
         int term = index(columns, Role.TERM);
@@ -241,9 +244,10 @@ public final class MappingGuess {
                     .filter(column -> column.role() == Role.VALUE)
                     .forEach(column -> ties.putIfAbsent(column.term(), terms.of(column.term(), "")));
         } else {
-            for (int row = header + 1; row < sheet.rows().size(); row++) {
+            for (int row = read.header() + 1; row < sheet.rows().size(); row++) {
                 String label = sheet.cell(row, term);
-                if (!label.isEmpty() && hasFigure(columns, row)) {
+                boolean figures = hasFigure(columns, row) && !Figures.isHeader(sheet, read, row);
+                if (!label.isEmpty() && figures) {
                     String kind = group < 0 ? "" : sheet.cell(row, group);
                     ties.putIfAbsent(Figures.label(label, kind), terms.of(label, kind));
                 }

@@ -79,7 +79,7 @@ final class TermWords {
     private static final Pattern OUTSIDE = Pattern.compile(
             "precipitation|rainfall|\\brain\\b|snow|run-?off|interception|sewer|soil (moisture|water)|overland|interflow|surface[- ]water|imported water|water use");
     private static final Pattern VERTICAL = Pattern.compile(
-            "vertical|overlying|underlying|from above|to above|from below|to below|upward|downward|deeper|shallower|aquitard|\\blids?\\b");
+            "vertical|overlying|underlying|from above|to above|from below|to below|upward|downward|deeper|shallower|aquitard|\\blids?\\b|through the (top|bottom|base)");
     private static final Pattern TOP = Pattern.compile("\\btop\\b|overlying|above|upper (face|boundary)|shallower");
     private static final Pattern BOTTOM =
             Pattern.compile("\\bbottom\\b|underlying|below|\\bbase\\b|lower (face|boundary)|deeper");
