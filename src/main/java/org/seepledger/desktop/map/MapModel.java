@@ -3,6 +3,7 @@ package org.seepledger.desktop.map;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
@@ -64,6 +65,7 @@ public final class MapModel {
         });
         session.interval().addListener((interval, before, after) -> findWells());
         session.target().addListener((target, before, after) -> after.ifPresent(this::goTo));
+        new MapOffer(session, this).begin();
     }
 
     /** Puts a cell into the middle, near enough to be seen among its neighbours. */
@@ -177,6 +179,7 @@ public final class MapModel {
     public void point(double x, double y) {
         Camera seen = camera.get();
         well.set(wellAt(x, y));
+        session.along().set(SectionTrace.along(session.sectionLine().get(), seen, x, y));
         readout.set(session.set()
                 .get()
                 .map(set -> Readout.at(
@@ -184,7 +187,8 @@ public final class MapModel {
                         seen.mapX(x),
                         seen.mapY(y),
                         session.layer().get(),
-                        values.view().get())));
+                        values.view().get(),
+                        session.numbers().get())));
     }
 
     private String wellAt(double x, double y) {
@@ -205,6 +209,7 @@ public final class MapModel {
     public void leave() {
         well.set("");
         readout.set(Optional.empty());
+        session.along().set(OptionalDouble.empty());
     }
 
     /** {@return what the window looks at} */
