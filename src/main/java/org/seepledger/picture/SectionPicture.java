@@ -119,8 +119,9 @@ public final class SectionPicture {
      * @param height in logical pixels
      */
     public static Picture of(Section section, double width, double height) {
-        Box box = box(section, width, height - legendHeight(section));
-        Picture bare = of(section, SectionFrame.fitting(section.profile(), box));
+        SectionKey key = new SectionKey(section.in(Optional.empty()), width - LEFT);
+        Box box = box(key, width, height - legendHeight(section));
+        Picture bare = new SectionPicture(section, SectionFrame.fitting(section.profile(), box), key).draw(width);
         List<Mark> marks = new ArrayList<>(bare.marks());
         Box legend = new Box(LEFT, bare.height() + GAP, Math.min(LEGEND, box.width()), RampLegend.LEVEL_HEIGHT);
         section.colours()
@@ -152,8 +153,11 @@ public final class SectionPicture {
      * @param height of the picture
      */
     public static Box box(Section section, double width, double height) {
-        double key = new SectionKey(section, width - LEFT).height();
-        return new Box(LEFT, TOP, Math.max(40, width - LEFT - RIGHT), Math.max(30, height - TOP - key));
+        return box(new SectionKey(section, width - LEFT), width, height);
+    }
+
+    private static Box box(SectionKey key, double width, double height) {
+        return new Box(LEFT, TOP, Math.max(40, width - LEFT - RIGHT), Math.max(30, height - TOP - key.height()));
     }
 
     /**
