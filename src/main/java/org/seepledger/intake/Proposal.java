@@ -55,7 +55,8 @@ public final class Proposal {
     }
 
     private static Item other(LooseFile.Other other) {
-        boolean shapes = other.kind() == LooseFile.Kind.SHAPES;
+        boolean lines = Vocabulary.words(other.shownName()).stream().anyMatch(word -> word.startsWith("transect"));
+        boolean shapes = other.kind() == LooseFile.Kind.SHAPES && !lines;
         Guess guess = shapes
                 ? new Guess(Role.PRISMS, Confidence.FAIR, "A GeoJSON may hold prisms.")
                 : new Guess(Role.NONE, Confidence.HIGH, other.words());

@@ -66,11 +66,22 @@ final class TableGuess {
     private static Use column(LooseFile.Table file, int index, boolean alone) {
         TableLook.Column column = file.look().columns().get(index);
         String stem = stem(file.shownName());
-        Guess guess = RoleGuess.of(column.name(), column.least(), column.greatest());
-        String text = column.name();
+        String text = Vocabulary.withoutUnit(column.name());
+        Guess guess = RoleGuess.of(text, column.least(), column.greatest());
+        boolean concentrations = column.limits() > 0
+                || Vocabulary.of(stem)
+                        .filter(said -> said.role() == Role.CONCENTRATION)
+                        .isPresent();
         if (guess.role() == Role.NONE && alone) {
             guess = RoleGuess.of(stem, column.least(), column.greatest());
-            text = stem;
+            text = guess.role() == Role.CONCENTRATION ? text : stem;
+        } else if (guess.role() == Role.NONE && concentrations) {
+            String why =
+                    column.limits() > 0 ? "Some cells give a limit with <" : "The file's name speaks of concentrations";
+            guess = new Guess(
+                    Role.CONCENTRATION,
+                    Confidence.FAIR,
+                    why + "; " + Wording.range(column.least(), column.greatest()) + ".");
         }
         Use use = UseGuess.of(index, column.name(), text, guess, column.least(), column.greatest(), unit(column));
         boolean fromFile = use.role().isSource()

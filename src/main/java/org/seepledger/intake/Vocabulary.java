@@ -227,6 +227,11 @@ final class Vocabulary {
                 && words.stream().noneMatch(Set.of("ground", "land")::contains);
     }
 
+    /** {@return a heading without what stands in brackets at its end} */
+    static String withoutUnit(String heading) {
+        return heading.replaceAll("\\s*[\\[(][^\\[(]*[\\])]\\s*$", "");
+    }
+
     /** {@return the words of a name, in lower case: letters apart from digits, and {@code bigWords} apart} */
     static List<String> words(String name) {
         String apart = name.replaceAll("(\\p{Lower})(\\p{Upper})", "$1 $2").toLowerCase(Locale.ROOT);

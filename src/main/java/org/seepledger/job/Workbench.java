@@ -15,6 +15,7 @@ import org.seepledger.balance.Span;
 import org.seepledger.balance.Trace;
 import org.seepledger.balance.WaterBalance;
 import org.seepledger.balance.WellRule;
+import org.seepledger.balance.Whereabouts;
 import org.seepledger.fault.UsageFault;
 import org.seepledger.io.DataFolder;
 import org.seepledger.io.aquifer.AquiferFolder;
@@ -30,6 +31,7 @@ import org.seepledger.ledger.Period;
 import org.seepledger.ledger.PeriodBudget;
 import org.seepledger.picture.Body;
 import org.seepledger.picture.NearbyWell;
+import org.seepledger.picture.Picture;
 import org.seepledger.picture.Profile;
 import org.seepledger.picture.Section;
 import org.seepledger.picture.SectionLine;
@@ -37,6 +39,7 @@ import org.seepledger.prism.Prism;
 import org.seepledger.progress.Cancelled;
 import org.seepledger.progress.Progress;
 import org.seepledger.sketch.Drawing;
+import org.seepledger.sketch.Limit;
 import org.seepledger.unit.Measure;
 
 /**
@@ -172,6 +175,23 @@ public final class Workbench implements AutoCloseable {
     }
 
     /**
+     * {@return the elevations of a surface raster, which prisms may then name as their top or bottom; it stays open as long as
+     * the workbench}
+     *
+     * @param file the file that the prisms are kept in, from whose folder the surface is named
+     * @param surface the surface
+     * @throws org.seepledger.fault.DataFault if it is not there, leads out of the folder, or does not match the grid
+     */
+    public GriddedValues surface(Path file, Limit.Surface surface) {
+        return gate.ask(Progress.NONE, progress -> {
+            DataFolder folder = DataFolder.holding(file, file.toString());
+            synchronized (surfaces) {
+                return surfaces.read(folder.resolve(surface.path(), "a top or bottom"), surface.path());
+            }
+        });
+    }
+
+    /**
      * {@return a picture that lies under the map}
      *
      * @param file a GeoTIFF in the aquifer's coordinate system
@@ -247,6 +267,28 @@ public final class Workbench implements AutoCloseable {
         double area = balance.cuts().get(0).area();
         return new IntervalBudget(
                 prism, area, interval, budget, balance.whereabouts().get(0), notes);
+    }
+
+    /**
+     * Looks where a prism does not close in a period.
+     *
+     * @param prism the prism; what lies beyond the grid is cut off
+     * @param period the period
+     * @param progress told how far the work is
+     * @return the cells furthest from balance, mean over all intervals that the period takes part of
+     * @throws org.seepledger.fault.DataFault if the prism is no polygon or lies off the grid, or the data are wrong
+     * @throws Cancelled if the work was stopped
+     */
+    public Whereabouts whereabouts(Prism prism, Period period, Progress progress) {
+        return gate.ask(progress, until -> {
+            List<Period.Part> parts = period.parts();
+            Span span = new Span(
+                    parts.get(0).interval(), parts.get(parts.size() - 1).interval() + 1);
+            List<Prism> admitted = List.of(reader(note -> {}).admitted(prism));
+            return WaterBalance.of(aquifer(), kept::around, span, admitted, WellRule.POINT, 1, until)
+                    .whereabouts()
+                    .get(0);
+        });
     }
 
     /**
@@ -342,6 +384,18 @@ public final class Workbench implements AutoCloseable {
             MapQuantity quantity, int layer, int interval, Window window, int stride, Progress progress) {
         return gate.ask(
                 progress, until -> new LayerReading(aquifer(), until).layer(quantity, layer, interval, window, stride));
+    }
+
+    /**
+     * {@return a map on paper of what a view shows}
+     *
+     * @param asked what it is to show
+     * @param progress told how far the work is
+     * @throws org.seepledger.fault.DataFault if the data are wrong, or the selected prism has no budget
+     * @throws Cancelled if the work was stopped
+     */
+    public Picture map(MapAsked asked, Progress progress) {
+        return new MapOnPaper(this, asked, progress).drawn();
     }
 
     /**

@@ -193,13 +193,13 @@ public final class SectionPicture {
         end(0, "A").ifPresent(marks::add);
         end(section.profile().length(), "A′").ifPresent(marks::add);
         marks.addAll(key.marks(box.x(), box.bottom() + 36, sheet.frame().exaggeration()));
+        return new Picture(width, box.bottom() + key.height(), title(), description(), marks);
+    }
+
+    private String title() {
         String subject = section.light().prism();
-        return new Picture(
-                width,
-                box.bottom() + key.height(),
-                subject.isEmpty() ? "Vertical section" : "Vertical section through " + subject,
-                description(),
-                marks);
+        return "Vertical section" + (subject.isEmpty() ? "" : " through " + subject)
+                + section.colours().map(by -> ", " + by.words()).orElse("");
     }
 
     /** The name of an end of the line, if that is seen. */

@@ -78,7 +78,7 @@ public final class ChartView extends BorderPane {
 
     private Optional<Picture> draw(double width, double height) {
         drawn = model.chart(width, height);
-        return drawn.map(BudgetSeries::picture);
+        return drawn.map(model::picture);
     }
 
     private void look(MouseEvent mouse) {

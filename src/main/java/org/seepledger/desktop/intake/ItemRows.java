@@ -8,7 +8,6 @@ import java.util.stream.Collectors;
 import org.seepledger.desktop.intake.ItemRow.Mark;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.intake.Finding;
-import org.seepledger.intake.Guess;
 import org.seepledger.intake.Item;
 import org.seepledger.intake.Plan;
 import org.seepledger.intake.Role;
@@ -66,15 +65,13 @@ final class ItemRows {
     }
 
     private static Mark of(Item item, List<Finding> findings) {
-        if (!item.isUsed()) {
-            return Mark.UNUSED;
-        }
         Mark worst = worst(findings.stream()
                 .filter(finding -> finding.item().equals(Optional.of(item.id())))
                 .toList());
-        boolean weak = item.uses().stream()
-                .anyMatch(use -> use.role() != Role.NONE && use.guess().confidence() == Guess.Confidence.LOW);
-        return worst == Mark.FINE && weak ? Mark.DOUBT : worst;
+        if (!item.isUsed()) {
+            return worst == Mark.FINE ? Mark.UNUSED : worst;
+        }
+        return worst;
     }
 
     private static String lead(Item item) {

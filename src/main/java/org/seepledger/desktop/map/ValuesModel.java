@@ -19,6 +19,7 @@ import org.seepledger.desktop.task.Lane;
 import org.seepledger.desktop.task.PaneState;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.words.FaultWords;
+import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.job.GridLayer;
 import org.seepledger.job.MapQuantity;
@@ -180,6 +181,11 @@ public final class ValuesModel {
     private void colour(LayerView shown, ValueScale taken) {
         scales.put(alike(shown.request()), taken);
         scale.set(Optional.of(taken));
+    }
+
+    /** {@return how numbers are written} */
+    ReadOnlyObjectProperty<NumberForm> numbers() {
+        return session.numbers();
     }
 
     /** {@return what can be shown} */

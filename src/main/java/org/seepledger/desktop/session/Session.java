@@ -15,8 +15,10 @@ import javafx.beans.property.StringProperty;
 import javafx.collections.FXCollections;
 import javafx.collections.ObservableMap;
 import org.seepledger.desktop.notice.Notices;
+import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.job.ShownPicture;
 import org.seepledger.job.TracedNumber;
+import org.seepledger.job.WellPlace;
 import org.seepledger.picture.Section;
 import org.seepledger.picture.SectionLine;
 import org.seepledger.prism.Prism;
@@ -37,7 +39,9 @@ public final class Session {
     private final ObjectProperty<Optional<RowAsked>> asked = new SimpleObjectProperty<>(Optional.empty());
     private final StringProperty solute = new SimpleStringProperty("");
     private final StringProperty status = new SimpleStringProperty("");
+    private final ObjectProperty<NumberForm> numbers = new SimpleObjectProperty<>(NumberForm.SPACE_POINT);
     private final Notices notices = new Notices();
+    private final ObjectProperty<List<WellPlace>> wells = new SimpleObjectProperty<>(List.of());
     private final ObjectProperty<FaceFlows> faceFlows = new SimpleObjectProperty<>(FaceFlows.NONE);
     private final ObjectProperty<Optional<CellPlace>> target = new SimpleObjectProperty<>(Optional.empty());
     private final ObjectProperty<Optional<Draped>> draped = new SimpleObjectProperty<>(Optional.empty());
@@ -122,6 +126,11 @@ public final class Session {
         return lit;
     }
 
+    /** {@return how numbers are written in the window} */
+    public ObjectProperty<NumberForm> numbers() {
+        return numbers;
+    }
+
     /** {@return the cells that are lit up, since a number rests on values in them} */
     public ObjectProperty<List<TracedNumber.Cell>> marked() {
         return marked;
@@ -145,6 +154,11 @@ public final class Session {
     /** {@return what the status line says can be done now} */
     public StringProperty status() {
         return status;
+    }
+
+    /** {@return the wells with their rates in the interval looked at} */
+    public ObjectProperty<List<WellPlace>> wells() {
+        return wells;
     }
 
     /** {@return what flows through the selected prism's faces, for arrows on the map} */

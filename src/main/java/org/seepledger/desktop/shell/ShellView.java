@@ -14,6 +14,7 @@ import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyCombination;
 import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.BorderPane;
+import javafx.scene.layout.Region;
 import javafx.scene.layout.StackPane;
 import org.seepledger.desktop.action.Action;
 import org.seepledger.desktop.action.Actions;
@@ -22,6 +23,8 @@ import org.seepledger.desktop.action.OwnKeys;
 import org.seepledger.desktop.notice.NoticeLine;
 import org.seepledger.desktop.notice.NoticePage;
 import org.seepledger.desktop.port.Settings;
+import org.seepledger.desktop.preferences.PreferencesModel;
+import org.seepledger.desktop.preferences.PreferencesPage;
 import org.seepledger.desktop.running.RunningList;
 import org.seepledger.desktop.running.RunningModel;
 import org.seepledger.desktop.running.RunningStrip;
@@ -34,6 +37,10 @@ public final class ShellView extends StackPane {
     private static final Set<KeyCode> WORKING_KEYS =
             EnumSet.of(KeyCode.TAB, KeyCode.ENTER, KeyCode.SPACE, KeyCode.DELETE, KeyCode.BACK_SPACE);
 
+    /** Less room than this, and what lies over the map would lie over each other: then the whole is scrolled. */
+    private static final double LEAST_WIDTH = 1180;
+
+    private static final double LEAST_HEIGHT = 720;
     /** How wide the pane beside the map is at first, in logical pixels, at least, and as a share of the window. */
     private static final double[] SIDE = {452, 0.3};
 
@@ -53,6 +60,7 @@ public final class ShellView extends StackPane {
     private final BorderPane work = new BorderPane();
     private final StackPane veil = new StackPane();
     private final ActionsPage actionsPage;
+    private final PreferencesPage preferencesPage;
     private final NoticePage noticePage;
     private final RunningList runningList;
     private final CautionPage cautionPage = new CautionPage(this::lift);
@@ -64,18 +72,27 @@ public final class ShellView extends StackPane {
      * @param slots what is put into the frame
      * @param actions everything that can be done
      * @param running what runs beside the window
+     * @param preferences what users want for good
      * @param settings keep how large panes are
      */
-    public ShellView(ShellModel model, Slots slots, Actions actions, RunningModel running, Settings settings) {
+    public ShellView(
+            ShellModel model,
+            Slots slots,
+            Actions actions,
+            RunningModel running,
+            PreferencesModel preferences,
+            Settings settings) {
         this.model = model;
         this.slots = slots;
         this.actions = actions;
         this.actionsPage = new ActionsPage(actions, this::lift);
         work.setCenter(panes());
+        this.preferencesPage = new PreferencesPage(preferences, this::lift);
         across.getItems().add(slots.map());
         this.side = slots.ledger().map(pane -> new Fold(across, pane, SIDE[0], SIDE[1], settings, "side.width"));
         this.below = slots.ribbon().map(pane -> new Fold(down, pane, BELOW[0], BELOW[1], settings, "below.height"));
-        Caption caption = new Caption(model, slots.showing(), this::showActions);
+        Caption caption =
+                new Caption(model, slots.showing(), this::showActions, () -> actions.perform("action.handover"));
         side.ifPresent(fold -> caption.add(fold.button("fold-side", "action.fold.side")));
         below.ifPresent(fold -> caption.add(fold.button("fold-below", "action.fold.below")));
         work.setTop(caption);
@@ -92,10 +109,32 @@ public final class ShellView extends StackPane {
                 lift();
             }
         });
-        getChildren().addAll(work, slots.welcome(), veil);
+        getChildren().addAll(work, slots.welcome());
         slots.welcome().visibleProperty().bind(model.atWelcome());
         work.visibleProperty().bind(model.atWelcome().not());
+        work.visibleProperty().addListener((visible, before, after) -> requestLayout());
+        work.setMinSize(LEAST_WIDTH, LEAST_HEIGHT);
         addEventFilter(KeyEvent.KEY_PRESSED, this::onKey);
+    }
+
+    /** The page that is not shown needs no room, but is laid out, so that it is there at once when it is turned to. */
+    @Override
+    protected double computeMinWidth(double height) {
+        return shown().minWidth(height);
+    }
+
+    @Override
+    protected double computeMinHeight(double width) {
+        return shown().minHeight(width);
+    }
+
+    private Node shown() {
+        return work.isVisible() ? work : slots.welcome();
+    }
+
+    /** {@return what lies over the window while a page is read} */
+    public Region veil() {
+        return veil;
     }
 
     private Node panes() {
@@ -142,6 +181,12 @@ public final class ShellView extends StackPane {
     public void showCaution() {
         lower(cautionPage);
         cautionPage.requestFocus();
+    }
+
+    /** Shows the preferences. */
+    public void showPreferences() {
+        lower(preferencesPage);
+        preferencesPage.open();
     }
 
     /** Shows all notices. */

@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalInt;
 import java.util.stream.DoubleStream;
+import java.util.stream.IntStream;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.Block;
 import org.seepledger.aquifer.Concentration;
@@ -155,10 +156,13 @@ public final class PlumeDrawing {
     private PlumeTrack track(PlumeResult result) {
         double unit = aquifer.grid().planUnit();
         List<PlumeTrack.Stop> stops = new ArrayList<>();
-        for (int instant = 0; instant <= result.end(); instant++) {
+        int[] located = IntStream.rangeClosed(0, result.end())
+                .filter(result.course()::isLocated)
+                .toArray();
+        for (int instant : located) {
             Course.Place at = result.course().at(instant);
             double time = aquifer.times().instant(instant);
-            String name = instant == 0 || instant == result.end()
+            String name = instant == located[0] || instant == located[located.length - 1]
                     ? aquifer.times().isoDate(time).orElseGet(() -> wording.number(time) + " " + aquifer.timeUnit())
                     : "";
             stops.add(new PlumeTrack.Stop(at.x(), at.y(), at.along() / unit, at.across() / unit, at.direction(), name));
