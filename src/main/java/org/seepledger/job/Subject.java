@@ -43,9 +43,8 @@ final class Subject implements AutoCloseable {
         this.surfaces = new SurfaceRasters(aquifer.grid(), notes::add);
         warnings.addAll(folder.warnings());
         notes.addAll(folder.notes());
-        int layers = aquifer.layers().size();
-        PrismsReader reader =
-                new PrismsReader(folder.crs(), aquifer.grid(), layers, clip, surfaces, warnings::add, notes::add);
+        PrismsReader reader = new PrismsReader(
+                folder.crs(), aquifer.grid(), aquifer.layers(), clip, surfaces, warnings::add, notes::add);
         try {
             this.prisms = reader.read(prismsFile, prismsFile.toString());
         } catch (RuntimeException e) {

@@ -16,10 +16,12 @@ import org.seepledger.desktop.budget.LiveBudget;
 import org.seepledger.desktop.budget.Reading;
 import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.session.OpenSet;
+import org.seepledger.desktop.session.RowAsked;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.solute.LivePlume;
 import org.seepledger.desktop.solute.MassReading;
 import org.seepledger.desktop.task.PaneState;
+import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.desktop.words.Words;
 
 /** The ledger of the selected prism: its rows, which geometry and time they belong to, and which face is lit up. */
@@ -37,8 +39,10 @@ public final class LedgerModel {
     private final ReadOnlyObjectWrapper<PaneState> state = new ReadOnlyObjectWrapper<>(PaneState.READY);
     private final ObjectProperty<Arrangement> arrangement = new SimpleObjectProperty<>(Arrangement.ITEMS);
     private final ObjectProperty<Order> order = new SimpleObjectProperty<>(Order.AS_DRAWN);
+    private final ObjectProperty<Optional<LedgerRow>> chosen = new SimpleObjectProperty<>(Optional.empty());
     private double largest;
     private String whose = "";
+    private String copyTitle = "";
 
     /**
      * Makes the model.
@@ -139,6 +143,20 @@ public final class LedgerModel {
         session.lit().set(row.isFace() ? row.item() : "");
     }
 
+    /** {@return the row that is chosen, if one is that has a number} */
+    public ObjectProperty<Optional<LedgerRow>> chosen() {
+        return chosen;
+    }
+
+    /** Asks where the number of the chosen row comes from. */
+    public void askOrigin() {
+        chosen.get()
+                .filter(row -> row.kind() != LedgerRow.Kind.HEADING)
+                .ifPresentOrElse(
+                        row -> session.asked().set(Optional.of(new RowAsked(row.group(), row.item(), row.layer()))),
+                        () -> session.notices().refuse(Words.of("ledger.origin.none")));
+    }
+
     /** {@return the first row about the face that is lit up, if there is one} */
     public Optional<LedgerRow> lit() {
         String item = session.lit().get();
@@ -156,7 +174,7 @@ public final class LedgerModel {
     /** Copies the rows with their units, in full precision. */
     public void copy() {
         if (!rows.isEmpty() && !belongs.get().isEmpty()) {
-            LedgerCopy copy = new LedgerCopy(belongs.get(), unit.get(), massUnit.get(), rows);
+            LedgerCopy copy = new LedgerCopy(copyTitle, unit.get(), massUnit.get(), rows);
             copies.table(copy.tabSeparated(), copy.html());
             session.notices().done(Words.of("ledger.copied", belongs.get()));
         }
@@ -169,6 +187,16 @@ public final class LedgerModel {
      */
     public double share(double value) {
         return largest == 0 || Double.isNaN(value) ? 0 : value / largest;
+    }
+
+    /**
+     * {@return a number of a row, as it is to be read}
+     *
+     * @param row the row
+     * @param value the number
+     */
+    public String text(LedgerRow row, double value) {
+        return session.numbers().get().of(row.text(value));
     }
 
     private void show() {
@@ -195,13 +223,18 @@ public final class LedgerModel {
                 .orElse(0);
         unit.set(sheet.unitName());
         massUnit.set(sheet.ofSolute().map(LedgerSheet.OfSolute::massUnit).orElse(""));
-        closure.set(sheet.ofSolute().map(LedgerSheet.OfSolute::closure).orElse(""));
-        String geometry = sheet.shown().whose(set);
-        whose = sheets.ofSolute()
-                ? Words.of("ledger.of.solute", session.solute().get(), geometry)
-                : geometry;
+        closure.set(session.numbers()
+                .get()
+                .of(sheet.ofSolute().map(LedgerSheet.OfSolute::closure).orElse("")));
+        whose = whose(set, sheet, session.numbers().get());
+        copyTitle = whose(set, sheet, NumberForm.SPACE_POINT);
         notes.set(String.join(" ", sheet.shown().notes()));
         rows.setAll(arranged);
+    }
+
+    private String whose(OpenSet set, LedgerSheet sheet, NumberForm form) {
+        String geometry = sheet.shown().whose(set, form);
+        return sheets.ofSolute() ? Words.of("ledger.of.solute", session.solute().get(), geometry) : geometry;
     }
 
     private void clear() {
