@@ -16,8 +16,10 @@ import org.seepledger.desktop.draw.DraftActions;
 import org.seepledger.desktop.draw.DraftFiles;
 import org.seepledger.desktop.draw.DraftHand;
 import org.seepledger.desktop.draw.DraftModel;
+import org.seepledger.desktop.draw.LidSurfaces;
 import org.seepledger.desktop.draw.Tray;
 import org.seepledger.desktop.folio.Folio;
+import org.seepledger.desktop.folio.Shelf;
 import org.seepledger.desktop.handover.HandoverModel;
 import org.seepledger.desktop.handover.HandoverPage;
 import org.seepledger.desktop.intake.IntakeModel;
@@ -37,6 +39,9 @@ import org.seepledger.desktop.port.RecentFolders;
 import org.seepledger.desktop.port.Settings;
 import org.seepledger.desktop.preferences.PreferencesModel;
 import org.seepledger.desktop.running.RunningModel;
+import org.seepledger.desktop.running.RunningStrip;
+import org.seepledger.desktop.section.SectionModel;
+import org.seepledger.desktop.section.SectionView;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Opening;
 import org.seepledger.desktop.session.Session;
@@ -46,6 +51,7 @@ import org.seepledger.desktop.shell.Slots;
 import org.seepledger.desktop.size.Magnifier;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.theme.Dress;
+import org.seepledger.desktop.welcome.FolderDrop;
 import org.seepledger.desktop.welcome.WelcomeModel;
 import org.seepledger.desktop.welcome.WelcomeView;
 import org.seepledger.desktop.words.Words;
@@ -68,6 +74,8 @@ final class Assembly {
     private final Folio folio;
     private final RunningModel running;
     private final MapView mapView;
+    private final SectionModel section;
+    private final Shelf shelf;
     private final ShellView view;
     private final Scene scene;
 
@@ -96,7 +104,7 @@ final class Assembly {
         this.draft = new DraftModel(session);
         this.hand = new DraftHand(draft);
         this.files = new DraftFiles(draft, outside.tasks(), outside.dialogs(), outside.questions());
-        this.tray = new Tray(draft, hand);
+        this.tray = new Tray(draft, hand, new LidSurfaces(draft, outside.tasks(), outside.dialogs()));
         GroundModel ground = new GroundModel(session, outside.tasks(), outside.dialogs());
         this.mapView = new MapView(map, ground, outside.tasks(), shell.theme(), hand, tray);
         draft.version().addListener((version, before, after) -> mapView.repaint());
@@ -104,13 +112,26 @@ final class Assembly {
         tray.whenLeft(mapView::focus);
         this.running = new RunningModel(outside.tasks()::running);
         this.folio = new Folio(session, outside.tasks(), outside.dialogs(), outside.copies(), shell.theme());
-        Slots slots = new Slots(
-                firstPages(), new ShowingBar(map), mapView, Optional.of(folio.pages()), Optional.of(folio.ribbon()));
+        this.section = new SectionModel(session, outside.tasks(), draft);
+        SectionView sectionView = new SectionView(section, shell.theme());
+        this.shelf =
+                new Shelf(List.of(folio.ribbon(), new Shelf.Page("shelf.section", sectionView.bar(), sectionView)));
+        Slots slots =
+                new Slots(firstPages(), new ShowingBar(map), mapView, Optional.of(folio.pages()), Optional.of(shelf));
         this.view = new ShellView(shell, slots, actions, running, preferences, outside.settings());
+        FolderDrop.on(view, welcome, over -> session.status().set(over ? Words.of("drop.open") : ""));
         actions.add(actionsOfWindow());
         actions.add(mapView.actions());
         actions.add(new DraftActions(draft, hand, files, tray, mapView::repaint).all(map));
         actions.add(folio.actions());
+        actions.add(sectionView.actions());
+        actions.add(List.of(new Action("actions.group.section", "action.section.show", "F12", shelf::turn)));
+        session.sectionLine()
+                .addListener((line, before, after) -> after.ifPresent(drawn -> {
+                    shelf.open(1);
+                    view.showBelow();
+                }));
+        view.spreadBelow(shelf.page());
         HandoverModel handover = new HandoverModel(
                 session, outside.tasks(), outside.dialogs(), outside.copies(), outside.opener(), new PicturePng());
         HandoverPage handoverPage = new HandoverPage(handover, view::lift);
@@ -164,7 +185,7 @@ final class Assembly {
     /** One behind the other; what is behind is hidden from the keyboard too. */
     private Node firstPages() {
         WelcomeView first = new WelcomeView(welcome);
-        IntakeView loose = new IntakeView(intake, this::leaveIntake);
+        IntakeView loose = new IntakeView(intake, new RunningStrip(running, this::listRunning), this::leaveIntake);
         MendView wrong = new MendView(mend);
         BooleanBinding mending =
                 Bindings.createBooleanBinding(() -> mend.folder().get().isPresent(), mend.folder());
@@ -172,6 +193,10 @@ final class Assembly {
         loose.visibleProperty().bind(intake.shown().and(mending.not()));
         wrong.visibleProperty().bind(mending);
         return new StackPane(first, loose, wrong);
+    }
+
+    private void listRunning() {
+        view.showRunning();
     }
 
     private void turnToIntake() {
@@ -260,6 +285,14 @@ final class Assembly {
 
     DraftModel draft() {
         return draft;
+    }
+
+    SectionModel section() {
+        return section;
+    }
+
+    Shelf shelf() {
+        return shelf;
     }
 
     MapModel map() {

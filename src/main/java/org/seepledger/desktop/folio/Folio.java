@@ -44,7 +44,7 @@ public final class Folio {
     private final LivePlume plumes;
     private final Session session;
     private final LedgerModel ledger;
-    private final Node ribbon;
+    private final ChartView ribbon;
 
     /**
      * Builds the panes.
@@ -68,7 +68,7 @@ public final class Folio {
         marks.getStyleClass().add("sl-marks");
         marks.setId("folio-marks");
         add("folio.ledger", new LedgerView(ledger));
-        add("folio.answers", new ClosureView(new ClosureModel(session, live, reading), theme));
+        add("folio.answers", new ClosureView(new ClosureModel(session, live, reading, tasks), theme));
         add("folio.exchange", new ExchangeView(new ExchangeModel(session, live, reading, copies), theme));
         // Before the model, which takes the question away.
         session.asked().addListener((asked, before, after) -> after.ifPresent(row -> open(ORIGIN)));
@@ -105,8 +105,8 @@ public final class Folio {
     }
 
     /** {@return the ribbon of time} */
-    public Node ribbon() {
-        return ribbon;
+    public Shelf.Page ribbon() {
+        return new Shelf.Page("shelf.time", ribbon.bar(), ribbon);
     }
 
     /** {@return how figures are read} */

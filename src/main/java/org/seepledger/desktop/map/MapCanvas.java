@@ -66,7 +66,9 @@ final class MapCanvas extends Region {
             session.lit(),
             session.marked(),
             session.faceFlows(),
-            model.wells(),
+            session.wells(),
+            session.sectionLine(),
+            session.along(),
             model.overlays().wells(),
             session.numbers()
         };
@@ -166,6 +168,7 @@ final class MapCanvas extends Region {
         painter.paint(Outlines.of(model.session(), camera));
         painter.paint(MarkedCells.of(model.session().marked().get(), aquifer.grid(), camera));
         painter.paint(written(Lettering.of(model)));
+        painter.paint(SectionTrace.of(model.session(), camera));
         guests.forEach(guest -> painter.paint(guest.marks(camera)));
         double scale = camera.scale() / aquifer.grid().planUnit();
         painter.paint(written(ScaleBar.within(scale, aquifer.lengthUnit().toString(), LONGEST_BAR)

@@ -4,6 +4,7 @@ import java.util.EnumSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import javafx.beans.value.ObservableValue;
 import javafx.geometry.Orientation;
 import javafx.scene.Node;
 import javafx.scene.Scene;
@@ -21,6 +22,7 @@ import javafx.scene.layout.StackPane;
 import org.seepledger.desktop.action.Action;
 import org.seepledger.desktop.action.Actions;
 import org.seepledger.desktop.action.ActionsPage;
+import org.seepledger.desktop.action.OwnKeys;
 import org.seepledger.desktop.notice.NoticeLine;
 import org.seepledger.desktop.notice.NoticePage;
 import org.seepledger.desktop.port.Settings;
@@ -47,6 +49,9 @@ public final class ShellView extends StackPane {
 
     /** How high the pane below it is at first. */
     private static final double[] BELOW = {196, 0.22};
+
+    /** How high the section is at first. */
+    private static final double[] SECTION = {290, 0.36};
 
     private final ShellModel model;
     private final Actions actions;
@@ -90,7 +95,8 @@ public final class ShellView extends StackPane {
         across.getItems().add(slots.map());
         this.side = slots.ledger().map(pane -> new Fold(across, pane, SIDE[0], SIDE[1], settings, "side.width"));
         this.below = slots.ribbon().map(pane -> new Fold(down, pane, BELOW[0], BELOW[1], settings, "below.height"));
-        Caption caption = new Caption(model, slots.showing(), this::showActions);
+        Caption caption =
+                new Caption(model, slots.showing(), this::showActions, () -> actions.perform("action.handover"));
         side.ifPresent(fold -> caption.add(fold.button("fold-side", "action.fold.side")));
         below.ifPresent(fold -> caption.add(fold.button("fold-below", "action.fold.below")));
         work.setTop(caption);
@@ -153,6 +159,24 @@ public final class ShellView extends StackPane {
     /** Folds the pane below the map away, or shows it again. */
     public void turnBelow() {
         below.ifPresent(Fold::turn);
+    }
+
+    /** Shows the pane below the map, if it is folded away. */
+    public void showBelow() {
+        below.ifPresent(Fold::show);
+    }
+
+    /**
+     * Gives the pane below the map a height for each of its pages.
+     *
+     * @param page which page is open: 0 for time, 1 for the section
+     */
+    public void spreadBelow(ObservableValue<Number> page) {
+        page.addListener((open, before, after) -> below.ifPresent(fold -> {
+            double[] size = after.intValue() == 0 ? BELOW : SECTION;
+            fold.show();
+            fold.take(after.intValue() == 0 ? "below.height" : "section.height", size[0], size[1]);
+        }));
     }
 
     /** Shows the page of all actions. */
@@ -286,6 +310,9 @@ public final class ShellView extends StackPane {
 
     private boolean isKept(KeyEvent key) {
         Node owner = getScene().getFocusOwner();
+        if (owner instanceof OwnKeys own && own.keeps(key)) {
+            return true;
+        }
         if (key.getCode().isFunctionKey() || key.getCode() == KeyCode.ESCAPE && key.isShiftDown()) {
             return false;
         }
