@@ -109,6 +109,7 @@ final class Assembly {
         this.mapView = new MapView(map, ground, outside.tasks(), shell.theme(), hand, tray);
         draft.version().addListener((version, before, after) -> mapView.repaint());
         draft.tool().addListener((tool, before, after) -> mapView.repaint());
+        tray.whenLeft(mapView::focus);
         this.running = new RunningModel(outside.tasks()::running);
         this.folio = new Folio(session, outside.tasks(), outside.dialogs(), outside.copies(), shell.theme());
         this.section = new SectionModel(session, outside.tasks(), draft);
