@@ -5,6 +5,7 @@ import java.util.DoubleSummaryStatistics;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.ToDoubleFunction;
+import java.util.stream.DoubleStream;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.balance.HotSpot;
 import org.seepledger.ledger.PeriodBudget;
@@ -281,11 +282,13 @@ public final class MapPicture {
 
     private void drawLine(SectionLine line) {
         MapFrame frame = sheet.frame();
-        double[] xy = {frame.x(line.fromX()), frame.y(line.fromY()), frame.x(line.toX()), frame.y(line.toY())};
+        double[] xy = line.places().stream()
+                .flatMapToDouble(place -> DoubleStream.of(frame.x(place.x()), frame.y(place.y())))
+                .toArray();
         sheet.above(new Mark.Line(xy, Stroke.of(Ink.Token.TEXT, 1).dashed(9.0, 3.0, 2.0, 3.0)));
         List<Mark> ends = new ArrayList<>();
         sheet.labels().place(List.of(end(xy[0], xy[1], "A")), ends);
-        sheet.labels().place(List.of(end(xy[2], xy[3], "A′")), ends);
+        sheet.labels().place(List.of(end(xy[xy.length - 2], xy[xy.length - 1], "A′")), ends);
         ends.forEach(sheet::above);
     }
 

@@ -25,6 +25,7 @@ final class FindingsBox extends VBox {
 
     private Button line(Finding finding) {
         Button line = new Button(Words.of("intake.finding", mark(finding.level()), finding.words()));
+        line.setMnemonicParsing(false);
         line.setWrapText(true);
         line.setTextAlignment(TextAlignment.LEFT);
         line.getStyleClass().setAll("sl-finding", style(finding.level()));

@@ -38,16 +38,17 @@ public final class IntakeView extends BorderPane {
      * Builds the page.
      *
      * @param model the files and what they make
+     * @param running shows how far work is, and stops it
      * @param back leaves the page
      */
-    public IntakeView(IntakeModel model, Runnable back) {
+    public IntakeView(IntakeModel model, Node running, Runnable back) {
         this.model = model;
         this.set = new SetPane(model);
         this.addFolder = button("intake-add-folder", "intake.add.folder", model::addFolder);
         this.problems = new FindingsBox(this::go);
         setId("intake");
         getStyleClass().add("sl-intake");
-        setTop(bar(back));
+        setTop(bar(running, back));
         setCenter(new StatePane(panes(), model.state()).withAction(Words.of("intake.add.folder"), model::addFolder));
         setOnDragOver(IntakeView::onDragOver);
         setOnDragDropped(this::onDropped);
@@ -62,7 +63,7 @@ public final class IntakeView extends BorderPane {
         show();
     }
 
-    private Node bar(Runnable back) {
+    private Node bar(Node running, Runnable back) {
         Label title = new Label(Words.of("intake.title"));
         title.getStyleClass().add("sl-name");
         Region gap = new Region();
@@ -70,6 +71,7 @@ public final class IntakeView extends BorderPane {
         HBox bar = new HBox(
                 title,
                 gap,
+                running,
                 button("intake-add-files", "intake.add.files", model::addFiles),
                 addFolder,
                 button("intake-clear", "intake.clear", model::clear),

@@ -110,6 +110,7 @@ public final class MendView extends BorderPane {
                 .map(line -> Words.of("intake.mend.line", line))
                 .orElse("aquifer.json");
         Button line = new Button(Words.of("intake.finding", where, fault.words()));
+        line.setMnemonicParsing(false);
         line.setWrapText(true);
         line.setTextAlignment(TextAlignment.LEFT);
         line.getStyleClass().setAll("sl-finding", "fault");

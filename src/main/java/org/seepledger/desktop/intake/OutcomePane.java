@@ -1,12 +1,15 @@
 package org.seepledger.desktop.intake;
 
+import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.function.Consumer;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.TextArea;
 import javafx.scene.control.TextField;
+import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
@@ -14,6 +17,7 @@ import org.seepledger.desktop.task.PaneState;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.intake.Composition;
 import org.seepledger.intake.Finding;
+import org.seepledger.job.Inspection;
 
 /** What the files make: what stands in the way, what the check says, and the writing. */
 final class OutcomePane extends VBox {
@@ -69,6 +73,9 @@ final class OutcomePane extends VBox {
         describe.setOnAction(pressed -> model.describe());
         cancel.setId("intake-cancel");
         cancel.setOnAction(pressed -> model.cancel());
+        for (Button button : List.of(write, describe, cancel, choose)) {
+            button.setMinWidth(USE_PREF_SIZE);
+        }
         for (Label label : List.of(size, obstacles, written)) {
             label.setWrapText(true);
             label.setMinHeight(USE_PREF_SIZE);
@@ -79,7 +86,13 @@ final class OutcomePane extends VBox {
         Label where = new Label(Words.of("intake.target.label"));
         where.getStyleClass().add("sl-muted");
         return new VBox(
-                8, where, new HBox(6, target, choose), size, new HBox(8, write, describe, cancel), obstacles, written);
+                8,
+                where,
+                new HBox(6, target, choose),
+                size,
+                new FlowPane(8, 8, write, describe, cancel),
+                obstacles,
+                written);
     }
 
     private void show() {
@@ -89,11 +102,12 @@ final class OutcomePane extends VBox {
         if (failed) {
             verdict.getStyleClass().add("sl-fault");
         }
-        checked.setText(model.check().get().text());
-        boolean told = !model.check().get().text().isEmpty();
+        Optional<Inspection> says = model.check().get().says();
+        checked.setText(says.map(Inspection::text).orElse(""));
+        boolean told = says.isPresent();
         checked.setVisible(told);
         checked.setManaged(told);
-        findings.show(model.made().get().map(now -> now.copied().findings()).orElse(List.of()));
+        findings.show(findings());
         verdict.setText(model.made().get().map(this::verdict).orElse(""));
         model.made().get().ifPresent(this::showWriting);
         PaneState state = model.written().get();
@@ -105,6 +119,7 @@ final class OutcomePane extends VBox {
         written.setText(state.words());
         written.setManaged(!state.words().isEmpty());
         cancel.setVisible(working);
+        cancel.setManaged(working);
         boolean sound = !failed
                 && model.made()
                         .get()
@@ -119,6 +134,19 @@ final class OutcomePane extends VBox {
                         .map(Made::placed)
                         .filter(Composition::isSound)
                         .isEmpty());
+    }
+
+    /** What stands in the way, and what the check warns of. */
+    private List<Finding> findings() {
+        List<Finding> all = new ArrayList<>(
+                model.made().get().map(now -> now.copied().findings()).orElse(List.of()));
+        model.check()
+                .get()
+                .says()
+                .ifPresent(says -> says.warnings()
+                        .forEach(words ->
+                                all.add(new Finding(Finding.Level.DOUBT, Optional.empty(), Optional.empty(), words))));
+        return all;
     }
 
     private String verdict(Made made) {

@@ -20,9 +20,9 @@ import org.seepledger.unit.Figures;
 /** Rasters: a small map, what names and bands count, what is made of them. */
 final class RastersPane extends VBox {
 
-    private static final double WIDTH = 300;
-    private static final double HEIGHT = 230;
-    private static final double BESIDE = 300;
+    private static final double WIDTH = 250;
+    private static final double HEIGHT = 210;
+    private static final double BESIDE = 230;
 
     private final IntakeModel model;
     private final Item.Rasters item;
@@ -92,7 +92,10 @@ final class RastersPane extends VBox {
                                 "intake.raster.range",
                                 Figures.typeset(look.least()),
                                 Figures.typeset(look.greatest())));
-        lines.add(Words.of("intake.raster.missing", Math.round(1000 * look.missing()) / 10.0));
+        lines.add(
+                look.missing() == 0
+                        ? Words.of("intake.raster.full")
+                        : Words.of("intake.raster.missing", Figures.typeset(Math.round(1000 * look.missing()) / 10.0)));
         lines.add(raster.place()
                 .map(place -> Words.of(
                         "intake.raster.place",

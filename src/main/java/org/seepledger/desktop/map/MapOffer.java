@@ -92,6 +92,9 @@ final class MapOffer {
                 "map.picture.title",
                 shown.quantity().label(),
                 set.aquifer().layers().get(shown.layer()).name(),
-                ShowingBar.interval(set.aquifer().times(), session.interval().get()));
+                ShowingBar.interval(
+                        set.aquifer().times(),
+                        session.interval().get(),
+                        session.numbers().get()));
     }
 }
