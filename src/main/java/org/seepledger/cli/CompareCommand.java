@@ -38,7 +38,11 @@ final class CompareCommand implements Callable<Integer> {
     @Parameters(index = "1", paramLabel = "RUN", description = "The folder that the second run wrote.")
     private Path second;
 
-    @Option(names = "--out", paramLabel = "DIR", required = true, description = "A new or empty folder for the results.")
+    @Option(
+            names = "--out",
+            paramLabel = "DIR",
+            required = true,
+            description = "A new or empty folder for the results.")
     private Path out;
 
     @Option(names = "--overwrite", description = "Replace the files that an earlier comparison wrote to DIR.")

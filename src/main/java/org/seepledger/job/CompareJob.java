@@ -59,15 +59,20 @@ public final class CompareJob {
     private String run(OutputFolder out) {
         List<Difference> differences = differences();
         stopwatch.lap("comparing");
-        ComparisonText text =
-                new ComparisonText(first.hashes(), second.hashes(), first.options(), second.options(), differences, notSplit);
+        ComparisonText text = new ComparisonText(
+                first.hashes(), second.hashes(), first.options(), second.options(), differences, notSplit);
         try {
             List<String> notes = notes();
             DifferencesCsv.write(out.file("differences.csv"), notes, differences);
             DifferencesCsv.writeInputs(out.file("inputs.csv"), notes, first.hashes(), second.hashes());
             Files.writeString(
                     out.file("compare.html"),
-                    ComparisonPage.of(text, request.first().toString(), request.second().toString(), request.date(), Version.text()));
+                    ComparisonPage.of(
+                            text,
+                            request.first().toString(),
+                            request.second().toString(),
+                            request.date(),
+                            Version.text()));
             RunRecord.write(out, "compare", options(), statement(), List.of(), Map.of(), stopwatch);
         } catch (IOException e) {
             throw new UsageFault("The results cannot be written beside " + request.out() + " (" + Unreadable.reason(e)
@@ -75,7 +80,8 @@ public final class CompareJob {
         }
         List<String> files = out.written();
         out.publish();
-        return String.join("\n", text.sentences()) + "\nWritten to " + request.out() + ": " + String.join(", ", files) + "\n";
+        return String.join("\n", text.sentences()) + "\nWritten to " + request.out() + ": " + String.join(", ", files)
+                + "\n";
     }
 
     private List<Difference> differences() {
@@ -110,7 +116,8 @@ public final class CompareJob {
         List<FileRecord> inputs = new ArrayList<>();
         for (RunFolder run : List.of(first, second)) {
             for (String name : List.of(RunJson.NAME, "budget.csv")) {
-                inputs.add(FileRecord.of(run.folder().resolve(name).toString(), run.folder().resolve(name)));
+                inputs.add(FileRecord.of(
+                        run.folder().resolve(name).toString(), run.folder().resolve(name)));
             }
         }
         return new Statement("Comparison of two runs by seepledger " + Version.text(), inputs, List.of(), List.of());

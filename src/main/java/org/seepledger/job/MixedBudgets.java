@@ -81,14 +81,19 @@ final class MixedBudgets implements AutoCloseable {
             boolean there = places.stream().anyMatch(place -> is(input, place));
             if (!there) {
                 throw new DataFault(
-                        run.folder().toString(), "input " + input.name(), "no file with the recorded hash", "the file as it was", "Bring it back, or go by the differences alone.");
+                        run.folder().toString(),
+                        "input " + input.name(),
+                        "no file with the recorded hash",
+                        "the file as it was",
+                        "Bring it back, or go by the differences alone.");
             }
         }
     }
 
     private static boolean is(FileRecord input, Path file) {
         try {
-            return Files.isRegularFile(file) && FileRecord.of(input.name(), file).equals(input);
+            return Files.isRegularFile(file)
+                    && FileRecord.of(input.name(), file).equals(input);
         } catch (IOException e) {
             return false;
         }
@@ -98,9 +103,11 @@ final class MixedBudgets implements AutoCloseable {
         Map<String, String> options = runs[inputs].options();
         boolean clip = Boolean.parseBoolean(options.get("clip"));
         int place = inputs * RUNS + area;
-        subjects[place] = Subject.open(Path.of(options.get("aquifer")), Path.of(runs[area].options().get("prisms")), clip);
+        subjects[place] = Subject.open(
+                Path.of(options.get("aquifer")), Path.of(runs[area].options().get("prisms")), clip);
         WellRule wells = WellRule.valueOf(options.getOrDefault("wells", "point").toUpperCase(Locale.ROOT));
-        balances[place] = WaterBalance.of(subjects[place].aquifer(), subjects[place].prisms(), wells, threads, progress);
+        balances[place] =
+                WaterBalance.of(subjects[place].aquifer(), subjects[place].prisms(), wells, threads, progress);
     }
 
     /**

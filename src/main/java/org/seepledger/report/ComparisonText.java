@@ -80,7 +80,8 @@ public record ComparisonText(
     }
 
     private static boolean differs(Difference one) {
-        double scale = Math.max(Math.abs(Difference.value(one.first(), false)), Math.abs(Difference.value(one.second(), false)));
+        double scale = Math.max(
+                Math.abs(Difference.value(one.first(), false)), Math.abs(Difference.value(one.second(), false)));
         boolean missing = one.first().isEmpty() || one.second().isEmpty();
         return missing || size(one) > ROUNDING * scale;
     }
@@ -89,32 +90,45 @@ public record ComparisonText(
     public List<String> sentences() {
         List<String> sentences = new ArrayList<>();
         Map<String, String> inputs = changedInputs();
-        sentences.add(inputs.isEmpty()
-                ? "Both runs read the same inputs."
-                : Wording.counted(inputs.size(), "input") + (inputs.size() == 1 ? " differs: " : " differ: ") + shortened(inputs) + ".");
+        sentences.add(
+                inputs.isEmpty()
+                        ? "Both runs read the same inputs."
+                        : Wording.counted(inputs.size(), "input") + (inputs.size() == 1 ? " differs: " : " differ: ")
+                                + shortened(inputs) + ".");
         changedOptions().forEach((name, change) -> sentences.add("Option " + name + ": " + change + "."));
         List<Difference> large = large();
-        long alone = large.stream().filter(one -> one.first().isEmpty() || one.second().isEmpty()).count();
-        sentences.add(large.isEmpty()
-                ? "All " + differences.size() + " rows are the same to rounding."
-                : large.size() + " of " + differences.size() + " rows differ"
-                        + (alone == 0 ? "." : ", " + alone + " of them because one run has no such row."));
-        notSplit.ifPresent(reason ->
-                sentences.add("What made the differences cannot be told, since the budgets cannot be struck again: " + reason));
-        large.stream().filter(one -> one.first().isPresent() && one.second().isPresent()).limit(TOLD).forEach(one -> sentences.add(sentence(one)));
+        long alone = large.stream()
+                .filter(one -> one.first().isEmpty() || one.second().isEmpty())
+                .count();
+        sentences.add(
+                large.isEmpty()
+                        ? "All " + differences.size() + " rows are the same to rounding."
+                        : large.size() + " of " + differences.size() + " rows differ"
+                                + (alone == 0 ? "." : ", " + alone + " of them because one run has no such row."));
+        notSplit.ifPresent(reason -> sentences.add(
+                "What made the differences cannot be told, since the budgets cannot be struck again: " + reason));
+        large.stream()
+                .filter(one -> one.first().isPresent() && one.second().isPresent())
+                .limit(TOLD)
+                .forEach(one -> sentences.add(sentence(one)));
         return sentences;
     }
 
     private static String shortened(Map<String, String> inputs) {
-        List<String> told = inputs.entrySet().stream().limit(TOLD).map(entry -> entry.getKey() + " (" + entry.getValue() + ")").toList();
+        List<String> told = inputs.entrySet().stream()
+                .limit(TOLD)
+                .map(entry -> entry.getKey() + " (" + entry.getValue() + ")")
+                .toList();
         return String.join(", ", told) + (inputs.size() > TOLD ? " and " + (inputs.size() - TOLD) + " more" : "");
     }
 
     private static String sentence(Difference one) {
         String unit = Difference.unit(one.first(), false);
         String other = Difference.unit(one.second(), false);
-        String words = "  " + one.any().prism() + ", " + one.any().period() + ", " + one.any().item() + " (layer " + one.any().layer() + "): "
-                + Figures.shown(Difference.value(one.first(), false)) + " " + unit + " → " + Figures.shown(Difference.value(one.second(), false)) + " " + other;
+        String words = "  " + one.any().prism() + ", " + one.any().period() + ", "
+                + one.any().item() + " (layer " + one.any().layer() + "): "
+                + Figures.shown(Difference.value(one.first(), false)) + " " + unit + " → "
+                + Figures.shown(Difference.value(one.second(), false)) + " " + other;
         return words + one.rate().map(split -> "; " + parts(split)).orElse("") + ".";
     }
 
@@ -124,7 +138,8 @@ public record ComparisonText(
      * @param split the parts
      */
     public static String parts(Split split) {
-        double scale = Math.abs(split.area()) + Math.abs(split.period()) + Math.abs(split.inputs()) + Math.abs(split.unit());
+        double scale =
+                Math.abs(split.area()) + Math.abs(split.period()) + Math.abs(split.inputs()) + Math.abs(split.unit());
         List<String> parts = new ArrayList<>();
         add(parts, split.area(), scale, "by area");
         add(parts, split.period(), scale, "by period");

@@ -36,19 +36,34 @@ class CompareCommandTest {
                  "geometry": {"type": "Polygon", "coordinates": [[[10,10],[%s,10],[%s,20],[10,20],[10,10]]]}}]}
                 """.formatted(east, east));
         List<String> arguments = new java.util.ArrayList<>(List.of(
-                "balance", files.aquifer().toString(), "--prisms", prisms.toString(), "--out", folder.resolve(name).toString()));
+                "balance",
+                files.aquifer().toString(),
+                "--prisms",
+                prisms.toString(),
+                "--out",
+                folder.resolve(name).toString()));
         arguments.addAll(List.of(more));
         Ran ran = Ran.of(arguments.toArray(String[]::new));
         assertThat(ran.err()).isEmpty();
     }
 
     private Ran compare() {
-        return Ran.of("compare", folder.resolve("one").toString(), folder.resolve("two").toString(), "--out",
-                folder.resolve("difference").toString(), "--overwrite");
+        return Ran.of(
+                "compare",
+                folder.resolve("one").toString(),
+                folder.resolve("two").toString(),
+                "--out",
+                folder.resolve("difference").toString(),
+                "--overwrite");
     }
 
     private List<CSVRecord> rows() throws IOException {
-        CSVFormat format = CSVFormat.RFC4180.builder().setCommentMarker('#').setHeader().setSkipHeaderRecord(true).get();
+        CSVFormat format = CSVFormat.RFC4180
+                .builder()
+                .setCommentMarker('#')
+                .setHeader()
+                .setSkipHeaderRecord(true)
+                .get();
         try (Reader text = Files.newBufferedReader(folder.resolve("difference/differences.csv"));
                 CSVParser rows = format.parse(text)) {
             return rows.getRecords();
@@ -60,8 +75,10 @@ class CompareCommandTest {
     }
 
     private static void assertPartsAdd(CSVRecord row) {
-        double parts = number(row, "by_area") + number(row, "by_period") + number(row, "by_inputs") + number(row, "by_unit");
-        assertThat(parts).isCloseTo(number(row, "difference"), within(1e-9 * (1 + Math.abs(number(row, "difference")))));
+        double parts =
+                number(row, "by_area") + number(row, "by_period") + number(row, "by_inputs") + number(row, "by_unit");
+        assertThat(parts)
+                .isCloseTo(number(row, "difference"), within(1e-9 * (1 + Math.abs(number(row, "difference")))));
     }
 
     @Test
@@ -73,10 +90,16 @@ class CompareCommandTest {
         assertThat(ran.status()).isZero();
         assertThat(ran.out()).contains("Option every: interval → record");
         balance("three", "0.1", 25, "--every", "interval", "--volume-unit", "L");
-        Ran.of("compare", folder.resolve("one").toString(), folder.resolve("three").toString(), "--out",
-                folder.resolve("difference").toString(), "--overwrite");
+        Ran.of(
+                "compare",
+                folder.resolve("one").toString(),
+                folder.resolve("three").toString(),
+                "--out",
+                folder.resolve("difference").toString(),
+                "--overwrite");
         List<CSVRecord> south = rows().stream()
-                .filter(row -> row.get("item").equals("side 1") && row.get("quantity").equals("net_volume"))
+                .filter(row ->
+                        row.get("item").equals("side 1") && row.get("quantity").equals("net_volume"))
                 .toList();
         assertThat(south).hasSize(2);
         for (CSVRecord row : south) {
@@ -96,7 +119,10 @@ class CompareCommandTest {
         Ran ran = compare();
         assertThat(ran.status()).isZero();
         assertThat(ran.out()).contains("aquifer.json (changed)", "cannot be told", "no file with the recorded hash");
-        CSVRecord west = rows().stream().filter(row -> row.get("item").equals("side 4")).findFirst().orElseThrow();
+        CSVRecord west = rows().stream()
+                .filter(row -> row.get("item").equals("side 4"))
+                .findFirst()
+                .orElseThrow();
         assertThat(number(west, "difference")).isCloseTo(4, within(1e-9));
         assertThat(number(west, "percent")).isCloseTo(100, within(1e-9));
         assertThat(west.get("by_inputs")).isEmpty();
@@ -110,11 +136,16 @@ class CompareCommandTest {
         balance("two", "0.2", 25);
         Ran ran = compare();
         assertThat(ran.err()).isEmpty();
-        CSVRecord west = rows().stream().filter(row -> row.get("item").equals("side 4")).findFirst().orElseThrow();
+        CSVRecord west = rows().stream()
+                .filter(row -> row.get("item").equals("side 4"))
+                .findFirst()
+                .orElseThrow();
         assertThat(number(west, "by_inputs")).isCloseTo(4, within(1e-9));
         assertThat(number(west, "by_area")).isZero();
         rows().stream().filter(row -> !row.get("by_area").isEmpty()).forEach(CompareCommandTest::assertPartsAdd);
-        assertThat(Files.readString(folder.resolve("difference/inputs.csv"))).contains("aquifer.json,").contains("changed");
+        assertThat(Files.readString(folder.resolve("difference/inputs.csv")))
+                .contains("aquifer.json,")
+                .contains("changed");
         assertThat(Files.readString(folder.resolve("difference/compare.html"))).contains("Two runs compared");
     }
 
@@ -126,7 +157,12 @@ class CompareCommandTest {
         Ran changed = compare();
         assertThat(changed.status()).isEqualTo(3);
         assertThat(changed.err()).contains("changed after the run");
-        Ran none = Ran.of("compare", folder.toString(), folder.toString(), "--out", folder.resolve("difference").toString());
+        Ran none = Ran.of(
+                "compare",
+                folder.toString(),
+                folder.toString(),
+                "--out",
+                folder.resolve("difference").toString());
         assertThat(none.status()).isEqualTo(3);
     }
 }

@@ -27,14 +27,26 @@ class ReviewCommandTest {
 
     private Ran review(Path set, Path submitted, String... more) {
         List<String> arguments = new java.util.ArrayList<>(List.of(
-                "review", set.toString(), "--prisms", set.resolve("prisms.geojson").toString(),
-                "--submitted", submitted.toString(), "--out", folder.resolve("review").toString(), "--overwrite"));
+                "review",
+                set.toString(),
+                "--prisms",
+                set.resolve("prisms.geojson").toString(),
+                "--submitted",
+                submitted.toString(),
+                "--out",
+                folder.resolve("review").toString(),
+                "--overwrite"));
         arguments.addAll(List.of(more));
         return Ran.of(arguments.toArray(String[]::new));
     }
 
     private List<CSVRecord> findings() throws IOException {
-        CSVFormat format = CSVFormat.RFC4180.builder().setCommentMarker('#').setHeader().setSkipHeaderRecord(true).get();
+        CSVFormat format = CSVFormat.RFC4180
+                .builder()
+                .setCommentMarker('#')
+                .setHeader()
+                .setSkipHeaderRecord(true)
+                .get();
         try (Reader text = Files.newBufferedReader(folder.resolve("review/findings.csv"));
                 CSVParser rows = format.parse(text)) {
             return rows.getRecords();
@@ -43,20 +55,39 @@ class ReviewCommandTest {
 
     @ParameterizedTest
     @CsvSource({
-        "terrace,interval", "terrace,month", "terrace,year", "terrace,water-year", "terrace,record",
-        "depot,interval", "depot,year", "depot,record",
-        "valley,month", "valley,year", "valley,water-year", "valley,record"
+        "terrace,interval",
+        "terrace,month",
+        "terrace,year",
+        "terrace,water-year",
+        "terrace,record",
+        "depot,interval",
+        "depot,year",
+        "depot,record",
+        "valley,month",
+        "valley,year",
+        "valley,water-year",
+        "valley,record"
     })
     void ourOwnBudgetIsSound(String sample, String every) throws IOException {
         Path set = Path.of("sample-aquifers", sample);
-        Ran.of("balance", set.toString(), "--prisms", set.resolve("prisms.geojson").toString(), "--every", every,
-                "--out", folder.resolve("budget").toString());
+        Ran.of(
+                "balance",
+                set.toString(),
+                "--prisms",
+                set.resolve("prisms.geojson").toString(),
+                "--every",
+                every,
+                "--out",
+                folder.resolve("budget").toString());
         Ran ran = review(set, folder.resolve("budget/budget.csv"));
         assertThat(ran.err()).isEmpty();
         assertThat(ran.status()).isZero();
         assertThat(findings()).allSatisfy(row -> assertThat(row.get("severity")).isEqualTo("note"));
-        long rows = Files.lines(folder.resolve("budget/budget.csv")).filter(line -> line.contains(",side,")).count();
-        assertThat(Files.lines(folder.resolve("review/side_by_side.csv")).filter(line -> line.contains("side"))).hasSizeGreaterThan((int) rows);
+        long rows = Files.lines(folder.resolve("budget/budget.csv"))
+                .filter(line -> line.contains(",side,"))
+                .count();
+        assertThat(Files.lines(folder.resolve("review/side_by_side.csv")).filter(line -> line.contains("side")))
+                .hasSizeGreaterThan((int) rows);
     }
 
     @Test
@@ -64,11 +95,15 @@ class ReviewCommandTest {
         Ran ran = review(TERRACE, TERRACE.resolve("submitted.csv"));
         assertThat(ran.err()).isEmpty();
         assertThat(ran.status()).isEqualTo(4);
-        assertThat(findings().stream().filter(row -> row.get("severity").equals("fault")).map(row -> row.get("code")))
+        assertThat(findings().stream()
+                        .filter(row -> row.get("severity").equals("fault"))
+                        .map(row -> row.get("code")))
                 .containsExactly("unit", "sign", "well", "sum");
         assertThat(ran.out()).contains("4 faults", "Deep 1", "side 3");
-        assertThat(Files.readString(folder.resolve("review/review.html"))).contains("Questions to the author", "not a determination of compliance");
-        JsonNode record = new ObjectMapper().readTree(folder.resolve("review/run.json").toFile());
+        assertThat(Files.readString(folder.resolve("review/review.html")))
+                .contains("Questions to the author", "not a determination of compliance");
+        JsonNode record =
+                new ObjectMapper().readTree(folder.resolve("review/run.json").toFile());
         assertThat(record.path("command").asText()).isEqualTo("review");
         assertThat(record.path("outputs").findValuesAsText("name"))
                 .contains("findings.csv", "side_by_side.csv", "mapping.json", "review.html");
@@ -96,9 +131,11 @@ class ReviewCommandTest {
         String used = Files.readString(folder.resolve("review/mapping.json"));
         assertThat(used).contains("far north", "source/recharge");
         Files.copy(folder.resolve("review/mapping.json"), folder.resolve("used.json"));
-        String before = Files.readString(folder.resolve("review/side_by_side.csv")).replaceAll("(?m)^#.*$", "");
+        String before =
+                Files.readString(folder.resolve("review/side_by_side.csv")).replaceAll("(?m)^#.*$", "");
         review(TERRACE, submitted, "--mapping", folder.resolve("used.json").toString());
-        assertThat(Files.readString(folder.resolve("review/side_by_side.csv")).replaceAll("(?m)^#.*$", "")).isEqualTo(before);
+        assertThat(Files.readString(folder.resolve("review/side_by_side.csv")).replaceAll("(?m)^#.*$", ""))
+                .isEqualTo(before);
     }
 
     @Test
@@ -109,7 +146,8 @@ class ReviewCommandTest {
         assertThat(ran.status()).isEqualTo(3);
         assertThat(ran.err()).contains("colums", "did you mean \"columns\"?");
         Files.writeString(mapping, "{\"terms\": [{\"label\": \"a\", \"is\": \"itm\"}]}");
-        assertThat(review(TERRACE, TERRACE.resolve("submitted.csv"), "--mapping", mapping.toString()).err())
+        assertThat(review(TERRACE, TERRACE.resolve("submitted.csv"), "--mapping", mapping.toString())
+                        .err())
                 .contains("terms, entry 1, is", "\"itm\"", "item, total in");
     }
 
@@ -123,13 +161,19 @@ class ReviewCommandTest {
                 =1+1,Total inflow,99
                 """);
         review(TERRACE, submitted);
-        Ran alone = Ran.of("review", "--submitted", submitted.toString(), "--out", folder.resolve("alone").toString());
+        Ran alone = Ran.of(
+                "review",
+                "--submitted",
+                submitted.toString(),
+                "--out",
+                folder.resolve("alone").toString());
         assertThat(alone.status()).isIn(0, 4);
         CSVFormat format = CSVFormat.RFC4180.builder().setCommentMarker('#').get();
         for (String file : List.of("review/findings.csv", "review/side_by_side.csv", "alone/findings.csv")) {
             try (Reader text = Files.newBufferedReader(folder.resolve(file));
                     CSVParser rows = format.parse(text)) {
-                rows.forEach(row -> row.forEach(cell -> assertThat(cell).as(file)
+                rows.forEach(row -> row.forEach(cell -> assertThat(cell)
+                        .as(file)
                         .satisfiesAnyOf(
                                 text1 -> assertThat(text1).doesNotMatch("(?s)^[=+\\-@\\t\\r].*"),
                                 text2 -> assertThat(text2).matches("-?[0-9.eE+-]+"))));
@@ -139,17 +183,33 @@ class ReviewCommandTest {
 
     @Test
     void withoutAnAquiferTheTableAloneIsLookedAt() {
-        Ran ran = Ran.of("review", "--submitted", TERRACE.resolve("submitted.csv").toString(), "--out", folder.resolve("alone").toString());
+        Ran ran = Ran.of(
+                "review",
+                "--submitted",
+                TERRACE.resolve("submitted.csv").toString(),
+                "--out",
+                folder.resolve("alone").toString());
         assertThat(ran.out()).contains("The table was looked at by itself", "fault sum");
         assertThat(ran.status()).isEqualTo(4);
     }
 
     @Test
     void refusesHalfARequestAndFilesThatAreNone() {
-        Ran half = Ran.of("review", TERRACE.toString(), "--submitted", "x.csv", "--out", folder.resolve("o").toString());
+        Ran half = Ran.of(
+                "review",
+                TERRACE.toString(),
+                "--submitted",
+                "x.csv",
+                "--out",
+                folder.resolve("o").toString());
         assertThat(half.status()).isEqualTo(2);
         assertThat(half.err()).contains("Give both AQUIFER and --prisms, or neither");
-        Ran none = Ran.of("review", "--submitted", TERRACE.resolve("submited.csv").toString(), "--out", folder.resolve("o").toString());
+        Ran none = Ran.of(
+                "review",
+                "--submitted",
+                TERRACE.resolve("submited.csv").toString(),
+                "--out",
+                folder.resolve("o").toString());
         assertThat(none.status()).isEqualTo(3);
         assertThat(none.err()).contains("Did you mean \"submitted.csv\"?");
         assertThat(folder.resolve("o")).doesNotExist();

@@ -40,11 +40,15 @@ class LoneTablesTest {
     private List<Finding> review(String text) throws IOException {
         Path file = folder.resolve("submitted.csv");
         Files.writeString(file, text);
-        return Review.of(Reading.of(file, Optional.empty(), Optional.empty(), 10), Optional.empty(), 1).findings();
+        return Review.of(Reading.of(file, Optional.empty(), Optional.empty(), 10), Optional.empty(), 1)
+                .findings();
     }
 
     private static List<Code> codes(List<Finding> findings) {
-        return findings.stream().filter(one -> one.severity() != Severity.NOTE).map(Finding::code).toList();
+        return findings.stream()
+                .filter(one -> one.severity() != Severity.NOTE)
+                .map(Finding::code)
+                .toList();
     }
 
     @Test
@@ -69,12 +73,14 @@ class LoneTablesTest {
 
     @Test
     void aResidualThatDoesNotFollow() throws IOException {
-        assertThat(codes(review(SOUND.replace("Change in storage;2.9", "Change in storage;1.2")))).contains(Code.BALANCE);
+        assertThat(codes(review(SOUND.replace("Change in storage;2.9", "Change in storage;1.2"))))
+                .contains(Code.BALANCE);
     }
 
     @Test
     void monthsThatDoNotMakeTheWhole() throws IOException {
-        assertThat(codes(review(SOUND.replace("Recharge;5.0;4.0;3.0;12.0", "Recharge;5.0;4.0;3.0;14.0")))).contains(Code.PARTS);
+        assertThat(codes(review(SOUND.replace("Recharge;5.0;4.0;3.0;12.0", "Recharge;5.0;4.0;3.0;14.0"))))
+                .contains(Code.PARTS);
     }
 
     @Test

@@ -24,7 +24,8 @@ class WholeCellsTest {
 
     @Test
     void takesCellsThatAreCoveredByHalfAndNoOthers() {
-        Prism whole = WholeCells.of(PrismCut.of(prism(2, 2, 38, 2, 38, 28, 2, 28), GRID), GRID).orElseThrow();
+        Prism whole = WholeCells.of(PrismCut.of(prism(2, 2, 38, 2, 38, 28, 2, 28), GRID), GRID)
+                .orElseThrow();
         PrismCut cut = PrismCut.of(whole, GRID);
         assertThat(cut.area()).isCloseTo(4 * 3 * 100, within(1e-9));
         for (int row = 0; row < 5; row++) {
@@ -37,7 +38,8 @@ class WholeCellsTest {
 
     @Test
     void cellsThatTouchAtACornerBecomeParts() {
-        Prism whole = WholeCells.of(PrismCut.of(prism(0, 0, 10, 0, 10.5, 10, 20, 10, 20, 20, 10, 20, 9.5, 10, 0, 10), GRID), GRID)
+        Prism whole = WholeCells.of(
+                        PrismCut.of(prism(0, 0, 10, 0, 10.5, 10, 20, 10, 20, 20, 10, 20, 9.5, 10, 0, 10), GRID), GRID)
                 .orElseThrow();
         assertThat(whole.parts()).hasSize(2);
         assertThat(PrismCut.of(whole, GRID).area()).isCloseTo(200, within(1e-9));
@@ -45,6 +47,7 @@ class WholeCellsTest {
 
     @Test
     void ofASliverNothingIsLeft() {
-        assertThat(WholeCells.of(PrismCut.of(prism(1, 1, 9, 1, 9, 3), GRID), GRID)).isEmpty();
+        assertThat(WholeCells.of(PrismCut.of(prism(1, 1, 9, 1, 9, 3), GRID), GRID))
+                .isEmpty();
     }
 }

@@ -20,8 +20,22 @@ import org.seepledger.review.change.Split;
 public final class DifferencesCsv {
 
     private static final String[] HEADER = {
-        "prism", "period", "group", "item", "layer", "quantity", "first", "first_unit", "second", "second_unit", "difference",
-        "percent", "by_area", "by_period", "by_inputs", "by_unit"
+        "prism",
+        "period",
+        "group",
+        "item",
+        "layer",
+        "quantity",
+        "first",
+        "first_unit",
+        "second",
+        "second_unit",
+        "difference",
+        "percent",
+        "by_area",
+        "by_period",
+        "by_inputs",
+        "by_unit"
     };
     private static final String[] INPUTS = {"name", "first_sha256", "second_sha256", "state"};
 
@@ -96,7 +110,10 @@ public final class DifferencesCsv {
             CSVPrinter rows = open(text, notes, INPUTS);
             for (String name : names) {
                 rows.printRecord(
-                        CsvText.text(name), first.getOrDefault(name, ""), second.getOrDefault(name, ""), state(name, first, second));
+                        CsvText.text(name),
+                        first.getOrDefault(name, ""),
+                        second.getOrDefault(name, ""),
+                        state(name, first, second));
             }
         }
     }

@@ -51,15 +51,25 @@ public record RunFolder(
         String command = RunJson.command(record);
         if (!command.equals("balance")) {
             throw new DataFault(
-                    record.toString(), "command", "\"" + command + "\"", "\"balance\"", "Name two folders that seepledger balance wrote.");
+                    record.toString(),
+                    "command",
+                    "\"" + command + "\"",
+                    "\"balance\"",
+                    "Name two folders that seepledger balance wrote.");
         }
         checkUnchanged(folder, record);
         JsonNode root = JsonFile.read(record, record.toString());
         Map<String, String> options = new LinkedHashMap<>();
-        root.path("options").fieldNames().forEachRemaining(name -> options.put(name, root.path("options").path(name).asText()));
+        root.path("options")
+                .fieldNames()
+                .forEachRemaining(name ->
+                        options.put(name, root.path("options").path(name).asText()));
         List<FileRecord> inputs = new ArrayList<>();
-        root.path("inputs").forEach(input -> inputs.add(new FileRecord(
-                input.path("name").asText(), input.path("bytes").asLong(), input.path("sha256").asText())));
+        root.path("inputs")
+                .forEach(input -> inputs.add(new FileRecord(
+                        input.path("name").asText(),
+                        input.path("bytes").asLong(),
+                        input.path("sha256").asText())));
         return new RunFolder(folder, root.path("version").asText(), options, inputs, rows(folder.resolve(BUDGET)));
     }
 
@@ -67,11 +77,17 @@ public record RunFolder(
         FileRecord recorded = RunJson.outputs(record).stream()
                 .filter(output -> output.name().equals(BUDGET))
                 .findFirst()
-                .orElseThrow(() -> new DataFault(record.toString(), "outputs", "no " + BUDGET, "one", "Strike the budget again."));
+                .orElseThrow(() ->
+                        new DataFault(record.toString(), "outputs", "no " + BUDGET, "one", "Strike the budget again."));
         Path budget = folder.resolve(BUDGET);
         try {
             if (!FileRecord.of(BUDGET, budget).equals(recorded)) {
-                throw new DataFault(budget.toString(), "", "a file that was changed after the run", "the one that the run wrote", "Strike the budget again.");
+                throw new DataFault(
+                        budget.toString(),
+                        "",
+                        "a file that was changed after the run",
+                        "the one that the run wrote",
+                        "Strike the budget again.");
             }
         } catch (IOException e) {
             throw Unreadable.file(budget.toString(), e);
@@ -79,7 +95,12 @@ public record RunFolder(
     }
 
     private static List<RecordedRow> rows(Path file) {
-        CSVFormat format = CSVFormat.RFC4180.builder().setCommentMarker('#').setHeader().setSkipHeaderRecord(true).get();
+        CSVFormat format = CSVFormat.RFC4180
+                .builder()
+                .setCommentMarker('#')
+                .setHeader()
+                .setSkipHeaderRecord(true)
+                .get();
         List<RecordedRow> rows = new ArrayList<>();
         try (Reader text = Files.newBufferedReader(file);
                 CSVParser parser = format.parse(text)) {

@@ -119,7 +119,8 @@ final class TextTable {
             return lines.get(0).charAt(4);
         }
         for (char separator : SEPARATORS) {
-            long once = lines.stream().filter(line -> count(line, separator) > 0).count();
+            long once =
+                    lines.stream().filter(line -> count(line, separator) > 0).count();
             long often =
                     lines.stream().filter(line -> count(line, separator) > 1).count();
             if (separator == ',' || often > 1 || once > 0.5 * lines.size()) {

@@ -79,7 +79,8 @@ public final class ComparisonPage {
 
     private static DomContent content(ComparisonText comparison) {
         return each(
-                section(h2("The answer"), each(comparison.sentences(), sentence -> p(sentence.strip()))).withId("answer"),
+                section(h2("The answer"), each(comparison.sentences(), sentence -> p(sentence.strip())))
+                        .withId("answer"),
                 changes("Options that differ", comparison.changedOptions()),
                 changes("Inputs that differ", comparison.changedInputs()),
                 differences(comparison.large()));
@@ -88,7 +89,10 @@ public final class ComparisonPage {
     private static DomContent changes(String title, Map<String, String> changes) {
         return changes.isEmpty()
                 ? text("")
-                : section(h2(title), dl(each(changes, (name, change) -> div(dt(code(name)), dd(change)))).withClass("facts options"));
+                : section(
+                        h2(title),
+                        dl(each(changes, (name, change) -> div(dt(code(name)), dd(change))))
+                                .withClass("facts options"));
     }
 
     private static DomContent differences(List<Difference> differences) {
@@ -99,8 +103,9 @@ public final class ComparisonPage {
         List<Difference> shown = differences.subList(0, Math.min(ROWS_SHOWN, differences.size()));
         return section(
                 h2("Differences"),
-                p("The parts by area, period, inputs and unit add to the difference. Each is the mean of what the change does in all"
-                        + " orders in which area, period and inputs can be changed. differences.csv has all rows, and volumes."),
+                p(
+                        "The parts by area, period, inputs and unit add to the difference. Each is the mean of what the change does in all"
+                                + " orders in which area, period and inputs can be changed. differences.csv has all rows, and volumes."),
                 Cells.scrolling(
                         title,
                         table(

@@ -46,7 +46,8 @@ public record Pairs(List<Pair> rows) {
         for (RecordedRow row : first) {
             String prism = Objects.requireNonNullElse(prisms.get(row.prism()), "");
             String period = Objects.requireNonNullElse(periods.get(row.period()), "");
-            pairs.add(new Pair(Optional.of(row), Optional.ofNullable(seconds.remove(List.of(prism, period, row.key())))));
+            pairs.add(
+                    new Pair(Optional.of(row), Optional.ofNullable(seconds.remove(List.of(prism, period, row.key())))));
         }
         seconds.values().forEach(row -> pairs.add(new Pair(Optional.empty(), Optional.of(row))));
         return new Pairs(pairs);
@@ -59,7 +60,8 @@ public record Pairs(List<Pair> rows) {
         Map<String, String> named = new LinkedHashMap<>();
         ones.stream().filter(others::contains).forEach(same -> named.put(same, same));
         List<String> left = ones.stream().filter(one -> !others.contains(one)).toList();
-        List<String> right = others.stream().filter(other -> !ones.contains(other)).toList();
+        List<String> right =
+                others.stream().filter(other -> !ones.contains(other)).toList();
         for (int i = 0; i < left.size() && left.size() == right.size(); i++) {
             named.put(left.get(i), right.get(i));
         }

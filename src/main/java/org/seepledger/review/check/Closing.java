@@ -32,8 +32,9 @@ final class Closing {
         this.tolerance = tolerance;
         for (Series one : series) {
             if (!isRepeated(one, series)) {
-                one.points().forEach(point -> periods.computeIfAbsent(point.when(), any -> new ArrayList<>())
-                        .add(new Term(one, point)));
+                one.points()
+                        .forEach(point -> periods.computeIfAbsent(point.when(), any -> new ArrayList<>())
+                                .add(new Term(one, point)));
             }
         }
     }
@@ -49,7 +50,8 @@ final class Closing {
     /** Whether what was submitted adds to nothing in all periods. */
     boolean closes() {
         return periods.values().stream().allMatch(terms -> {
-            double half = terms.stream().mapToDouble(term -> term.point().half()).sum();
+            double half =
+                    terms.stream().mapToDouble(term -> term.point().half()).sum();
             return Math.abs(sum(terms, Point::submitted)) <= half + 0.1 * tolerance * throughput(terms);
         });
     }

@@ -99,8 +99,8 @@ final class Coverage {
     private Finding grouped(Series one, Set<String> taken) {
         String group = one.selection().items().iterator().next().replaceFirst("/.*", "");
         boolean alike = taken.stream().allMatch(key -> key.startsWith(group));
-        String names =
-                String.join(", ", taken.stream().map(key -> "\"" + name(key) + "\"").toList());
+        String names = String.join(
+                ", ", taken.stream().map(key -> "\"" + name(key) + "\"").toList());
         return slips.finding(
                 alike ? Severity.NOTE : Severity.DOUBT,
                 Code.GROUPED,
@@ -114,11 +114,13 @@ final class Coverage {
 
     private void report(String key) {
         Selection selection = new Selection(Set.of(key), Set.of(), -1);
-        Point most = points()
-                .max(Comparator.comparingDouble(point -> share(point, key)))
+        Point most = points().max(Comparator.comparingDouble(point -> share(point, key)))
                 .orElseThrow();
-        double net = selection.of(most.basis(), Selection.Way.NET, Sense.NET) * most.source().cubicMetres() / most.unit();
-        boolean noSides = key.startsWith(Group.SIDE.toString()) && series.stream().noneMatch(Series::faces);
+        double net = selection.of(most.basis(), Selection.Way.NET, Sense.NET)
+                * most.source().cubicMetres()
+                / most.unit();
+        boolean noSides =
+                key.startsWith(Group.SIDE.toString()) && series.stream().noneMatch(Series::faces);
         boolean small = noSides || share(most, key) <= 5 * tolerance;
         findings.add(new Finding(
                 small ? Severity.DOUBT : Severity.FAULT,

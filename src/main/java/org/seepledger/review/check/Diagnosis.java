@@ -75,7 +75,9 @@ final class Diagnosis {
 
     /** The terms that differ; one whose in and out are both too small by the same was netted, and does not. */
     private static List<Series> bad(List<Series> among) {
-        return among.stream().filter(one -> !one.agrees() && !netted(one, among)).toList();
+        return among.stream()
+                .filter(one -> !one.agrees() && !netted(one, among))
+                .toList();
     }
 
     private static boolean netted(Series one, List<Series> among) {
@@ -107,10 +109,11 @@ final class Diagnosis {
 
     private Set<String> words(Aspect aspect) {
         Set<String> words = new LinkedHashSet<>();
-        series.forEach(one -> one.points().forEach(point -> point.source().variants().stream()
-                .filter(variant -> variant.aspect() == aspect)
-                .map(Variant::words)
-                .forEach(words::add)));
+        series.forEach(one -> one.points()
+                .forEach(point -> point.source().variants().stream()
+                        .filter(variant -> variant.aspect() == aspect)
+                        .map(Variant::words)
+                        .forEach(words::add)));
         return words;
     }
 
@@ -220,7 +223,8 @@ final class Diagnosis {
                     .map(one -> one.against(Aspect.FULL_LAYERS, words))
                     .flatMap(Optional::stream)
                     .toList();
-            boolean all = !bad.isEmpty() && full.size() == sides.size() && bad(full).isEmpty();
+            boolean all =
+                    !bad.isEmpty() && full.size() == sides.size() && bad(full).isEmpty();
             if (all && largest(full) < 0.3 * largest(sides)) {
                 bad.forEach(one -> findings.add(slips.finding(
                         slips.weight(one),
@@ -256,8 +260,9 @@ final class Diagnosis {
                         && in.points().size() == out.points().size();
                 if (pair && in.hasThatOf(out) && out.hasThatOf(in)) {
                     Code code = in.storage() ? Code.STORAGE_TURNED : Code.SIGN;
-                    String words =
-                            in.storage() ? ": release and uptake are exchanged." : ": inflow and outflow are exchanged.";
+                    String words = in.storage()
+                            ? ": release and uptake are exchanged."
+                            : ": inflow and outflow are exchanged.";
                     findings.add(slips.finding(Severity.FAULT, code, in, in.quoted() + words));
                     found.add(in);
                     found.add(out);
@@ -281,7 +286,8 @@ final class Diagnosis {
                             Severity.FAULT,
                             Code.SIGN,
                             one,
-                            one.quoted() + " would agree if \"" + name + "\", which is part of it, counted the other way."));
+                            one.quoted() + " would agree if \"" + name
+                                    + "\", which is part of it, counted the other way."));
                     found.addAll(same);
                 });
             }
@@ -305,8 +311,8 @@ final class Diagnosis {
                     first.quoted() + " alone differs, and the budget then closes, though the recomputed one does not:"
                             + " the residual may be booked into it."));
         } else if (!oneTerm && new Closing(left, tolerance).cancels()) {
-            String names =
-                    String.join(", ", left.stream().map(Series::quoted).distinct().toList());
+            String names = String.join(
+                    ", ", left.stream().map(Series::quoted).distinct().toList());
             Series worst = left.stream()
                     .max(Comparator.comparingDouble(Series::worstShare))
                     .orElseThrow();
@@ -316,7 +322,8 @@ final class Diagnosis {
                             worst,
                             names + " differ by amounts that cancel: the budget closes all the same, and closure tells"
                                     + " nothing of them.")
-                    .about(String.join(" + ", left.stream().map(Series::term).distinct().toList())));
+                    .about(String.join(
+                            " + ", left.stream().map(Series::term).distinct().toList())));
         } else {
             left.forEach(one -> findings.add(slips.area(one).orElseGet(() -> slips.difference(one))));
         }

@@ -25,7 +25,8 @@ final class Pairing {
     private final double tolerance;
     private final Amount assumed;
 
-    private Pairing(List<Figure> figures, Map<String, String> areas, Reference reference, Rounding rounding, double tolerance) {
+    private Pairing(
+            List<Figure> figures, Map<String, String> areas, Reference reference, Rounding rounding, double tolerance) {
         this.tolerance = tolerance;
         this.figures = figures.stream()
                 .filter(figure -> !Double.isNaN(figure.value()) && tied(figure) && areas.containsKey(figure.area()))

@@ -71,12 +71,13 @@ record Series(
     /** Whether it and the other way of the same term are too small by the same. */
     boolean isNettedWith(Series other) {
         boolean same = points.size() == other.points().size();
-        return same && IntStream.range(0, points.size()).allMatch(i -> {
-            Point own = points.get(i);
-            Point two = other.points().get(i);
-            double allowed = Math.max(own.half() + two.half(), tolerance * own.throughput());
-            return own.off() <= allowed && Math.abs(own.off() - two.off()) <= allowed;
-        });
+        return same
+                && IntStream.range(0, points.size()).allMatch(i -> {
+                    Point own = points.get(i);
+                    Point two = other.points().get(i);
+                    double allowed = Math.max(own.half() + two.half(), tolerance * own.throughput());
+                    return own.off() <= allowed && Math.abs(own.off() - two.off()) <= allowed;
+                });
     }
 
     /** The ways of counting that a table may have gone by. */
@@ -105,7 +106,8 @@ record Series(
     /** Whether it would agree if it counted the other way. */
     boolean agreesTurned() {
         return points.stream().allMatch(point -> {
-            double net = selection.of(point.basis(), Way.NET, sense) * point.source().cubicMetres();
+            double net =
+                    selection.of(point.basis(), Way.NET, sense) * point.source().cubicMetres();
             double allowed = Math.max(point.half(), tolerance * point.throughput());
             return Math.abs(point.submitted() + net) <= allowed;
         });
@@ -135,7 +137,10 @@ record Series(
                 .allMatch(point ->
                         variant(point, aspect, words).filter(selection::any).isPresent());
         return all
-                ? Optional.of(with(selection, way, point -> variant(point, aspect, words).orElseThrow())
+                ? Optional.of(with(
+                                selection,
+                                way,
+                                point -> variant(point, aspect, words).orElseThrow())
                         .settled())
                 : Optional.empty();
     }

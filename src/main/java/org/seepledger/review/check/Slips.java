@@ -111,8 +111,8 @@ final class Slips {
                 ? Optional.of(new Ratio(1, "an amount a day to one in each period"))
                 : byPeriod ? Optional.empty() : KnownRatios.nearest(middle);
         double sign = Math.signum(middle);
-        return known.filter(ratio -> series.isTimes(
-                point -> sign * ratio.value() * period.applyAsDouble(point), KnownRatios.NEAR));
+        return known.filter(
+                ratio -> series.isTimes(point -> sign * ratio.value() * period.applyAsDouble(point), KnownRatios.NEAR));
     }
 
     private List<Double> ratios(Series series, ToDoubleFunction<Point> period) {
@@ -203,11 +203,13 @@ final class Slips {
         return WellSet.upToTwo(count)
                 .filter(set -> set.explains(series))
                 .findFirst()
-                .map(set -> finding(weight(series), Code.WELL, series, series.quoted() + " " + set.words(series) + "."));
+                .map(set ->
+                        finding(weight(series), Code.WELL, series, series.quoted() + " " + set.words(series) + "."));
     }
 
     Finding difference(Series series) {
-        String words = series.quoted() + " differs by up to " + Figures.percent(100 * series.worstShare()) + " of throughput.";
+        String words =
+                series.quoted() + " differs by up to " + Figures.percent(100 * series.worstShare()) + " of throughput.";
         return finding(weight(series), Code.DIFFERENCE, series, words);
     }
 

@@ -45,7 +45,9 @@ final class TurnedItem {
         Sense sense = oneWay ? Sense.NET : series.sense();
         double times = series.sense() == Sense.OUT ? 1 : oneWay ? -1 : -2;
         return series.points().stream().allMatch(point -> {
-            double made = times * item.of(point.basis(), Way.NET, sense) * point.source().cubicMetres();
+            double made = times
+                    * item.of(point.basis(), Way.NET, sense)
+                    * point.source().cubicMetres();
             double allowed = Math.max(point.half(), tolerance * point.throughput()) + NEAR * Math.abs(made);
             return Math.abs(made) > tolerance * point.throughput() && Math.abs(point.off() - made) <= allowed;
         });

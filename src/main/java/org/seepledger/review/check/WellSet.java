@@ -64,8 +64,11 @@ record WellSet(List<Choice> choices) {
                 .map(choice -> {
                     WellVolume well = series.points().get(0).source().wells().get(choice.well());
                     String where = well.inside() ? "inside the outline" : "outside the outline";
-                    return (choice.more() ? "seems to count" : "seems to leave out") + " well \"" + well.name() + "\", which lies "
-                            + where + (choice.more() && well.inside() ? ", and which the recomputed budget does not count here" : "");
+                    return (choice.more() ? "seems to count" : "seems to leave out") + " well \"" + well.name()
+                            + "\", which lies " + where
+                            + (choice.more() && well.inside()
+                                    ? ", and which the recomputed budget does not count here"
+                                    : "");
                 })
                 .collect(Collectors.joining(", and "));
     }

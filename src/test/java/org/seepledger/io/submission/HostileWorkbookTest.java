@@ -37,7 +37,8 @@ class HostileWorkbookTest {
         void write(OutputStream out) throws IOException;
     }
 
-    private Path workbook(String contents, String relations, String strings, String styles, Content sheet) throws IOException {
+    private Path workbook(String contents, String relations, String strings, String styles, Content sheet)
+            throws IOException {
         Path file = folder.resolve("submitted.xlsx");
         try (ZipOutputStream zip = new ZipOutputStream(Files.newOutputStream(file))) {
             add(zip, "xl/workbook.xml", out -> out.write(contents.getBytes(StandardCharsets.UTF_8)));
@@ -76,14 +77,17 @@ class HostileWorkbookTest {
 
     @Test
     void readsTextsNumbersDatesAndPercentagesAsTheyAreMeant() throws IOException {
-        String strings = "<sst " + MAIN + "><si><t>Item</t></si><si><r><t>Re</t></r><r><t>charge</t></r><rPh><t>x</t></rPh></si></sst>";
-        String styles = "<styleSheet " + MAIN + "><numFmts><numFmt numFmtId=\"164\" formatCode=\"yyyy\\-mm\"/></numFmts>"
-                + "<cellStyleXfs><xf numFmtId=\"14\"/></cellStyleXfs>"
-                + "<cellXfs><xf numFmtId=\"0\"/><xf numFmtId=\"164\"/><xf numFmtId=\"10\"/></cellXfs></styleSheet>";
+        String strings = "<sst " + MAIN
+                + "><si><t>Item</t></si><si><r><t>Re</t></r><r><t>charge</t></r><rPh><t>x</t></rPh></si></sst>";
+        String styles =
+                "<styleSheet " + MAIN + "><numFmts><numFmt numFmtId=\"164\" formatCode=\"yyyy\\-mm\"/></numFmts>"
+                        + "<cellStyleXfs><xf numFmtId=\"14\"/></cellStyleXfs>"
+                        + "<cellXfs><xf numFmtId=\"0\"/><xf numFmtId=\"164\"/><xf numFmtId=\"10\"/></cellXfs></styleSheet>";
         String sheet = rows("<row r=\"2\"><c r=\"A2\" t=\"s\"><v>0</v></c><c r=\"B2\" s=\"1\"><v>44470</v></c></row>"
                 + "<row r=\"3\"><c r=\"A3\" t=\"s\"><v>1</v></c><c r=\"B3\"><f>1+1</f><v>12.5</v></c>"
                 + "<c r=\"D3\" s=\"2\"><v>0.0033</v></c><c r=\"E3\" t=\"inlineStr\"><is><t>m3/d</t></is></c></row>");
-        List<Sheet> sheets = SubmissionFile.read(workbook(CONTENTS, RELATIONS, strings, styles, text(sheet)), "submitted.xlsx");
+        List<Sheet> sheets =
+                SubmissionFile.read(workbook(CONTENTS, RELATIONS, strings, styles, text(sheet)), "submitted.xlsx");
         assertThat(sheets).hasSize(1);
         Sheet read = sheets.get(0);
         assertThat(read.cell(1, 0)).isEqualTo("Item");
@@ -112,15 +116,27 @@ class HostileWorkbookTest {
     @Test
     void refusesAMillionRows() throws IOException {
         assertRefused(
-                workbook(CONTENTS, RELATIONS, "", "", text(rows("<row r=\"1000000\"><c r=\"A1000000\"><v>1</v></c></row>"))),
+                workbook(
+                        CONTENTS,
+                        RELATIONS,
+                        "",
+                        "",
+                        text(rows("<row r=\"1000000\"><c r=\"A1000000\"><v>1</v></c></row>"))),
                 "row 1000000");
     }
 
     @Test
     void refusesTooManyColumnsAndRowsOutOfOrder() throws IOException {
-        assertRefused(workbook(CONTENTS, RELATIONS, "", "", text(rows("<row r=\"1\"><c r=\"XFD1\"><v>1</v></c></row>"))), "column 16384");
         assertRefused(
-                workbook(CONTENTS, RELATIONS, "", "", text(rows("<row r=\"5\"><c r=\"A5\"><v>1</v></c></row><row r=\"2\"/>"))),
+                workbook(CONTENTS, RELATIONS, "", "", text(rows("<row r=\"1\"><c r=\"XFD1\"><v>1</v></c></row>"))),
+                "column 16384");
+        assertRefused(
+                workbook(
+                        CONTENTS,
+                        RELATIONS,
+                        "",
+                        "",
+                        text(rows("<row r=\"5\"><c r=\"A5\"><v>1</v></c></row><row r=\"2\"/>"))),
                 "rows that are not in order");
     }
 
@@ -137,7 +153,13 @@ class HostileWorkbookTest {
     void refusesEntitiesThatGrow() throws IOException {
         StringBuilder type = new StringBuilder("<!DOCTYPE x [<!ENTITY a0 \"ha\">");
         for (int i = 1; i < 30; i++) {
-            type.append("<!ENTITY a").append(i).append(" \"&a").append(i - 1).append(";&a").append(i - 1).append(";\">");
+            type.append("<!ENTITY a")
+                    .append(i)
+                    .append(" \"&a")
+                    .append(i - 1)
+                    .append(";&a")
+                    .append(i - 1)
+                    .append(";\">");
         }
         String sheet = type + "]>" + rows("<row r=\"1\"><c r=\"A1\" t=\"inlineStr\"><is><t>&a29;</t></is></c></row>");
         assertRefused(workbook(CONTENTS, RELATIONS, "", "", text(sheet)), "document type");
@@ -145,7 +167,8 @@ class HostileWorkbookTest {
 
     @Test
     void followsNoPartOutsideTheWorkbook() throws IOException {
-        String relations = RELATIONS.replace("Target=\"worksheets/sheet1.xml\"", "Target=\"file:///etc/passwd\" TargetMode=\"External\"");
+        String relations = RELATIONS.replace(
+                "Target=\"worksheets/sheet1.xml\"", "Target=\"file:///etc/passwd\" TargetMode=\"External\"");
         assertRefused(workbook(CONTENTS, relations, "", "", text(rows(""))), "no sheet that can be seen");
     }
 
@@ -156,7 +179,8 @@ class HostileWorkbookTest {
         Path cut = folder.resolve("cut.xlsx");
         Files.write(cut, java.util.Arrays.copyOf(bytes, bytes.length / 2));
         assertRefused(cut, "a damaged workbook");
-        assertRefused(workbook(CONTENTS, RELATIONS, "", "", text("<worksheet><sheetData><row></worksheet>")), "damaged");
+        assertRefused(
+                workbook(CONTENTS, RELATIONS, "", "", text("<worksheet><sheetData><row></worksheet>")), "damaged");
         Path old = folder.resolve("old.xls");
         Files.write(old, new byte[] {(byte) 0xD0, (byte) 0xCF, 0x11, (byte) 0xE0, 0, 0});
         assertRefused(old, "password");
@@ -183,11 +207,15 @@ class HostileWorkbookTest {
     @Test
     void readsOldCodePagesAndByteOrderMarks() throws IOException {
         Path file = folder.resolve("western.csv");
-        Files.write(file, "Term;m³\nPumping;−3\n".replace('−', '-').getBytes(java.nio.charset.Charset.forName("windows-1252")));
+        Files.write(
+                file,
+                "Term;m³\nPumping;−3\n".replace('−', '-').getBytes(java.nio.charset.Charset.forName("windows-1252")));
         assertThat(SubmissionFile.read(file, "f").get(0).cell(0, 1)).isEqualTo("m³");
         Files.writeString(file, "\uFEFFTerm;m³\n\n# a note\nPumping;3\n");
         Sheet sheet = SubmissionFile.read(file, "f").get(0);
         assertThat(sheet.cell(0, 0)).isEqualTo("Term");
-        assertThat(sheet.cell(3, 1)).as("blank lines and notes keep their place").isEqualTo("3");
+        assertThat(sheet.cell(3, 1))
+                .as("blank lines and notes keep their place")
+                .isEqualTo("3");
     }
 }

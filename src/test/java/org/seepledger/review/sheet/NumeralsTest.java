@@ -41,8 +41,7 @@ class NumeralsTest {
 
     @Test
     void readsTheUnitBeside() {
-        assertThat(Numerals.with('.').read("1,200 m³/day").orElseThrow())
-                .isEqualTo(new Numeral(1200, 0.5, "m³/day"));
+        assertThat(Numerals.with('.').read("1,200 m³/day").orElseThrow()).isEqualTo(new Numeral(1200, 0.5, "m³/day"));
         assertThat(Numerals.with('.').read("0.3 %").orElseThrow().unit()).isEqualTo("%");
     }
 
@@ -92,7 +91,8 @@ class NumeralsTest {
 
     @Test
     void understandsUnitsOfTheTrade() {
-        assertThat(UnitWords.of("AFY").orElseThrow().inMetresAndDays()).isCloseTo(1233.48183754752 / 365.25, org.assertj.core.api.Assertions.within(1e-9));
+        assertThat(UnitWords.of("AFY").orElseThrow().inMetresAndDays())
+                .isCloseTo(1233.48183754752 / 365.25, org.assertj.core.api.Assertions.within(1e-9));
         assertThat(UnitWords.of("1000 m3").orElseThrow().inMetresAndDays()).isEqualTo(1000);
         assertThat(UnitWords.of("m3/month").orElseThrow().perPeriod()).isTrue();
         assertThat(UnitWords.of("m³/d").orElseThrow().amount()).isEqualTo(Amount.RATE);
