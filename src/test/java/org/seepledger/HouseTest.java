@@ -10,6 +10,7 @@ import static com.tngtech.archunit.library.dependencies.SlicesRuleDefinition.sli
 
 import com.tngtech.archunit.base.DescribedPredicate;
 import com.tngtech.archunit.core.domain.JavaClass;
+import com.tngtech.archunit.core.domain.properties.HasName;
 import com.tngtech.archunit.core.importer.ImportOption;
 import com.tngtech.archunit.junit.AnalyzeClasses;
 import com.tngtech.archunit.junit.ArchTest;
@@ -17,7 +18,12 @@ import com.tngtech.archunit.lang.ArchCondition;
 import com.tngtech.archunit.lang.ArchRule;
 import com.tngtech.archunit.lang.ConditionEvents;
 import com.tngtech.archunit.lang.SimpleConditionEvent;
+import java.io.PrintStream;
+import java.io.PrintWriter;
+import java.time.format.DateTimeFormatter;
+import java.util.Formatter;
 import java.util.List;
+import java.util.Scanner;
 
 /** The rules of the house: which package may know which, and who may do what. */
 @AnalyzeClasses(packages = "org.seepledger", importOptions = ImportOption.DoNotIncludeTests.class)
@@ -131,6 +137,19 @@ class HouseTest {
             .because("a job must not know whether a command line or a window asked for it");
 
     @ArchTest
+    static final ArchRule GUESSES_WRITE_NO_FILES = noClasses()
+            .that()
+            .resideInAPackage(ROOT + "intake..")
+            .should()
+            .callMethodWhere(target(owner(type("java.nio.file.Files")))
+                    .and(target(HasName.Predicates.nameMatching(
+                            "write.*|new.*(Writer|OutputStream)|copy|move|delete.*|create.*|set.*"))))
+            .orShould()
+            .dependOnClassesThat()
+            .resideInAnyPackage(ROOT + "balance..", ROOT + "prism..", ROOT + "report..")
+            .because("what a person brings is only read, and what it is can be told without a budget");
+
+    @ArchTest
     static final ArchRule ENGINE_KNOWS_NO_FILES = noClasses()
             .that()
             .resideInAnyPackage(ENGINE)
@@ -221,6 +240,33 @@ class HouseTest {
             .haveNameMatching(
                     "java\\.lang\\.Thread|java\\.util\\.concurrent\\.Executor(Service|s)|javafx\\.concurrent\\..*")
             .because("work that nobody can cancel or run at once in a test would come in by the back door");
+
+    @ArchTest
+    static final ArchRule NO_TEXT_DEPENDS_ON_THE_COUNTRY = noClasses()
+            .should()
+            .callMethod(String.class, "toLowerCase")
+            .orShould()
+            .callMethod(String.class, "toUpperCase")
+            .orShould()
+            .callMethod(String.class, "format", String.class, Object[].class)
+            .orShould()
+            .callMethod(String.class, "formatted", Object[].class)
+            .orShould()
+            .callMethod(PrintWriter.class, "printf", String.class, Object[].class)
+            .orShould()
+            .callMethod(PrintStream.class, "printf", String.class, Object[].class)
+            .orShould()
+            .callMethod(DateTimeFormatter.class, "ofPattern", String.class)
+            .orShould()
+            .callConstructor(Formatter.class)
+            .orShould()
+            .callConstructor(Scanner.class, String.class)
+            .orShould()
+            .dependOnClassesThat()
+            .haveNameMatching("java\\.text\\.(Decimal|Number|SimpleDate|Message)Format")
+            .because("where the language is Turkish, lower case of I is not i, and where it is German, a number has a"
+                    + " comma: files, parsers and drawings would differ from machine to machine. Name Locale.ROOT")
+            .allowEmptyShould(false);
 
     @ArchTest
     static final ArchRule NAMES_SAY_WHAT_A_THING_IS = noClasses()

@@ -35,7 +35,10 @@ public record Span(int from, int to) {
         return new Span(interval, interval + 1);
     }
 
-    int count() {
+    /**
+     * {@return how many there are}
+     */
+    public int count() {
         return to - from;
     }
 

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.OptionalDouble;
+import java.util.stream.IntStream;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.Solute;
 import org.seepledger.aquifer.Times;
@@ -31,6 +32,7 @@ import org.seepledger.plume.SoluteBalance;
 import org.seepledger.plume.TransectFlows;
 import org.seepledger.prism.Transect;
 import org.seepledger.progress.Progress;
+import org.seepledger.report.PlumeResult;
 import org.seepledger.report.PlumeSummary;
 import org.seepledger.unit.Measure;
 
@@ -44,6 +46,7 @@ public final class PlumeJob {
     private final MassUnits units;
     private final List<Period> periods;
     private final OptionalDouble above;
+    private final ReportFile report;
     private List<MeasuredPanels> measured = List.of();
     private List<Crossing> crossings = List.of();
 
@@ -52,13 +55,13 @@ public final class PlumeJob {
         this.subject = subject;
         this.stopwatch = stopwatch;
         this.progress = progress;
-        this.units = units();
+        this.units = subject.massUnits(request.rateUnit(), request.massUnit(), request.volumeUnit());
         this.periods = subject.periods(request.every(), request.periods(), request.waterYearStart());
         this.above = request.above()
-                .map(threshold -> OptionalDouble.of(threshold.value()
-                        / MassUnits.concentrationFactor(
-                                threshold.unit(), subject.aquifer().lengthUnit())))
+                .map(threshold ->
+                        OptionalDouble.of(threshold.kilograms(subject.aquifer().lengthUnit())))
                 .orElse(OptionalDouble.empty());
+        this.report = new ReportFile(request.report(), periods);
     }
 
     /**
@@ -77,20 +80,6 @@ public final class PlumeJob {
         try (OutputFolder out = OutputFolder.at(request.out(), "plume", request.overwrite());
                 Subject subject = Subject.open(request.aquifer(), request.prisms(), request.clip())) {
             return new PlumeJob(request, subject, stopwatch, progress).run(out);
-        }
-    }
-
-    private MassUnits units() {
-        try {
-            return MassUnits.of(
-                    subject.aquifer().lengthUnit(),
-                    subject.aquifer().timeUnit(),
-                    request.rateUnit().orElse(null),
-                    request.massUnit().orElse(null),
-                    request.volumeUnit().orElse(null));
-        } catch (IllegalArgumentException e) {
-            throw new UsageFault("The unit asked for does not fit: " + e.getMessage()
-                    + ". Give a rate as kg/yr, a mass as kg and a volume as m3.");
         }
     }
 
@@ -120,18 +109,19 @@ public final class PlumeJob {
         subject.warnings().addAll(ofSolutes.warnings(plumes));
         subject.notes().addAll(ofWater.remarks(request.wells()));
         subject.notes().addAll(ofSolutes.remarks(solutes, plumes));
-        write(out, plumes, water);
+        int each = solutes.size();
+        List<PlumeResult> results = IntStream.range(0, plumes.size())
+                .mapToObj(i -> PlumeResult.of(aquifer, plumes.get(i), periods, records.get(i / each), above))
+                .toList();
+        write(out, results, water);
         List<String> files = out.written();
         out.publish();
-        String summary =
-                new PlumeSummary(aquifer, records, periods, units).of(plumes, subject.warnings(), subject.notes());
+        String summary = PlumeSummary.of(aquifer, results, units, subject.warnings(), subject.notes());
         return new PlumeOutcome(summary, worst(plumes), files);
     }
 
     private List<Solute> solutes() {
-        List<Solute> solutes = subject.folder().solutes().stream()
-                .filter(solute -> solute.concentration().isPresent())
-                .toList();
+        List<Solute> solutes = SoluteBench.known(subject.folder().solutes());
         if (solutes.isEmpty()) {
             throw new DataFault(
                     AquiferReader.FILE,
@@ -164,7 +154,8 @@ public final class PlumeJob {
                 .orElse(List.of());
     }
 
-    private void write(OutputFolder out, List<Plume> plumes, Balance water) {
+    private void write(OutputFolder out, List<PlumeResult> results, Balance water) {
+        List<Plume> plumes = results.stream().map(PlumeResult::plume).toList();
         Aquifer aquifer = subject.aquifer();
         Times times = aquifer.times();
         Statement statement = subject.statement("Solute budget of \"" + aquifer.name() + "\"", progress);
@@ -177,6 +168,8 @@ public final class PlumeJob {
                 TransectCsv.write(
                         out.file("transect.csv"), statement, crossings, measured, periods, times, units, length);
             }
+            Map<String, String> ofResult = optionsOfResult();
+            report.write(out, subject, results, crossings, measured, units, statement, ofResult);
             RunRecord.write(out, "plume", options(), statement, subject.notes(), RunRecord.checks(water), stopwatch);
         } catch (IOException e) {
             throw new UsageFault("The results cannot be written beside " + request.out() + " (" + Unreadable.reason(e)
@@ -185,6 +178,14 @@ public final class PlumeJob {
     }
 
     private Map<String, String> options() {
+        Map<String, String> options = optionsOfResult();
+        options.putAll(report.options());
+        options.put("threads", String.valueOf(request.threads()));
+        return options;
+    }
+
+    /** The options that results depend on. */
+    private Map<String, String> optionsOfResult() {
         Map<String, String> options = RunRecord.options(request.aquifer(), request.prisms());
         RunRecord.addPeriods(options, request.every(), request.periods(), request.waterYearStart());
         options.put("rate-unit", units.rate().toString());
@@ -196,7 +197,6 @@ public final class PlumeJob {
         request.transects().ifPresent(file -> options.put("transects", file.toString()));
         request.panels().ifPresent(file -> options.put("panels", file.toString()));
         options.put("clip", String.valueOf(request.clip()));
-        options.put("threads", String.valueOf(request.threads()));
         return options;
     }
 

@@ -4,6 +4,7 @@ import java.nio.file.Path;
 import java.util.Optional;
 import org.seepledger.balance.Periods;
 import org.seepledger.balance.WellRule;
+import org.seepledger.io.result.MassUnits;
 import org.seepledger.unit.Measure;
 
 /**
@@ -26,6 +27,7 @@ import org.seepledger.unit.Measure;
  * @param clip whether prisms are cut at the grid's edge
  * @param threads how many threads may work
  * @param overwrite whether an earlier run's files may be replaced
+ * @param report what the report is to look like
  */
 public record PlumeRequest(
         Path aquifer,
@@ -44,7 +46,31 @@ public record PlumeRequest(
         Optional<Path> panels,
         boolean clip,
         int threads,
-        boolean overwrite) {
+        boolean overwrite,
+        ReportRequest report) {
+
+    /** The same request with its results in another folder. */
+    PlumeRequest into(Path folder) {
+        return new PlumeRequest(
+                aquifer,
+                prisms,
+                folder,
+                every,
+                periods,
+                waterYearStart,
+                rateUnit,
+                massUnit,
+                volumeUnit,
+                wells,
+                dispersion,
+                above,
+                transects,
+                panels,
+                clip,
+                threads,
+                overwrite,
+                report);
+    }
 
     /**
      * A concentration with its unit.
@@ -52,5 +78,15 @@ public record PlumeRequest(
      * @param value the number
      * @param unit its unit
      */
-    public record Threshold(double value, Measure unit) {}
+    public record Threshold(double value, Measure unit) {
+
+        /**
+         * {@return the concentration in kg/length³}
+         *
+         * @param length the set's length unit
+         */
+        public double kilograms(Measure length) {
+            return value / MassUnits.concentrationFactor(unit, length);
+        }
+    }
 }

@@ -18,9 +18,6 @@ import org.seepledger.unit.Figures;
 /** Puts into words what the reader of a solute balance must know. */
 final class PlumeWarnings {
 
-    /** From this share of mass on, what stands for non-detects decides too much. */
-    private static final double TOO_UNDETECTED = 0.15;
-
     /** From this decay within an interval on, the mean of its two ends is too coarse. */
     private static final double TOO_FAST = 0.5;
 
@@ -64,30 +61,27 @@ final class PlumeWarnings {
         int worst = 0;
         long detects = 0;
         long nonDetects = 0;
-        double least = Double.POSITIVE_INFINITY;
-        double greatest = 0;
         for (int instant = 0; instant < plume.stocks().size(); instant++) {
             Stock stock = plume.whole(instant);
             worst = stock.undetectedShare() > plume.whole(worst).undetectedShare() ? instant : worst;
             detects += stock.detects();
             nonDetects += stock.nonDetects();
-            least = Math.min(least, stock.leastLimit());
-            greatest = Math.max(greatest, stock.greatestLimit());
         }
         Stock stock = plume.whole(worst);
         if (detects == 0 && nonDetects > 0) {
             warnings.add(
                     name(plume) + ": every concentration is below its detection limit. Check the limit and its unit;"
                             + " whether any of it is there is not known.");
-        } else if (stock.undetectedShare() > TOO_UNDETECTED) {
+        } else if (stock.undetectedShare() > NonDetects.TOO_MUCH) {
             warnings.add(name(plume) + ": " + Figures.percent(100 * stock.undetectedShare())
                     + " of the mass rests on non-detects at time "
                     + Figures.shown(aquifer.times().instant(worst)) + " "
                     + aquifer.timeUnit() + "; it is from " + Figures.shown(stock.total(NonDetects.ZERO)) + " to "
                     + Figures.shown(stock.total(NonDetects.LIMIT)) + " kg: a bracket, not an estimate.");
         }
-        if (greatest > least * (1 + 1e-9)) {
-            warnings.add(name(plume) + ": detection limits differ (the greatest is " + Figures.shown(greatest / least)
+        double ratio = plume.limitsRatio();
+        if (ratio > 1 + 1e-9) {
+            warnings.add(name(plume) + ": detection limits differ (the greatest is " + Figures.shown(ratio)
                     + " times the least); a trend may be the limits' alone.");
         }
     }

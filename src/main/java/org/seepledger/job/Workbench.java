@@ -6,13 +6,16 @@ import java.util.List;
 import java.util.Optional;
 import java.util.function.Consumer;
 import org.seepledger.aquifer.Aquifer;
+import org.seepledger.aquifer.GriddedValues;
 import org.seepledger.aquifer.KeptCells;
 import org.seepledger.aquifer.Window;
 import org.seepledger.balance.Balance;
 import org.seepledger.balance.Periods;
 import org.seepledger.balance.Span;
+import org.seepledger.balance.Trace;
 import org.seepledger.balance.WaterBalance;
 import org.seepledger.balance.WellRule;
+import org.seepledger.balance.Whereabouts;
 import org.seepledger.fault.UsageFault;
 import org.seepledger.io.DataFolder;
 import org.seepledger.io.aquifer.AquiferFolder;
@@ -26,10 +29,17 @@ import org.seepledger.io.result.Provenance;
 import org.seepledger.io.result.ResultUnits;
 import org.seepledger.ledger.Period;
 import org.seepledger.ledger.PeriodBudget;
+import org.seepledger.picture.Body;
+import org.seepledger.picture.NearbyWell;
+import org.seepledger.picture.Picture;
+import org.seepledger.picture.Profile;
+import org.seepledger.picture.Section;
+import org.seepledger.picture.SectionLine;
 import org.seepledger.prism.Prism;
 import org.seepledger.progress.Cancelled;
 import org.seepledger.progress.Progress;
 import org.seepledger.sketch.Drawing;
+import org.seepledger.sketch.Limit;
 import org.seepledger.unit.Measure;
 
 /**
@@ -47,12 +57,14 @@ public final class Workbench implements AutoCloseable {
     private final SurfaceRasters surfaces;
     private final KeptCells kept;
     private final Gate gate = new Gate();
+    private final SoluteBench solutes;
 
     private Workbench(AquiferFolder folder) {
         this.folder = folder;
         this.surfaces = new SurfaceRasters(folder.aquifer().grid(), note -> {});
         long memory = Runtime.getRuntime().maxMemory() / 4;
         this.kept = new KeptCells(folder.aquifer(), Math.min(MOST_KEPT_BYTES, memory));
+        this.solutes = new SoluteBench(folder, kept::around, gate, notes -> reader(notes::add));
     }
 
     /**
@@ -99,6 +111,12 @@ public final class Workbench implements AutoCloseable {
      */
     public List<Provenance> origins() {
         return folder.origins();
+    }
+
+    /** {@return whether concentrations of a solute are given, so that its budget can be struck} */
+    public boolean hasSolutes() {
+        return folder.solutes().stream()
+                .anyMatch(solute -> solute.concentration().isPresent());
     }
 
     /**
@@ -157,6 +175,23 @@ public final class Workbench implements AutoCloseable {
     }
 
     /**
+     * {@return the elevations of a surface raster, which prisms may then name as their top or bottom; it stays open as long as
+     * the workbench}
+     *
+     * @param file the file that the prisms are kept in, from whose folder the surface is named
+     * @param surface the surface
+     * @throws org.seepledger.fault.DataFault if it is not there, leads out of the folder, or does not match the grid
+     */
+    public GriddedValues surface(Path file, Limit.Surface surface) {
+        return gate.ask(Progress.NONE, progress -> {
+            DataFolder folder = DataFolder.holding(file, file.toString());
+            synchronized (surfaces) {
+                return surfaces.read(folder.resolve(surface.path(), "a top or bottom"), surface.path());
+            }
+        });
+    }
+
+    /**
      * {@return a picture that lies under the map}
      *
      * @param file a GeoTIFF in the aquifer's coordinate system
@@ -175,14 +210,30 @@ public final class Workbench implements AutoCloseable {
      * @throws UsageFault if it cannot be written
      */
     public void write(Path file, Drawing drawing) {
-        Optional<String> named =
-                crs().isLocal() ? Optional.empty() : crs().code().or(() -> Optional.of(crs().wkt()));
-        DrawingWriter.write(file, named, drawing);
+        DrawingWriter.write(file, crs().name(), drawing);
+    }
+
+    /**
+     * Makes sure that a file holds a drawing and nothing else.
+     *
+     * @param file the file
+     * @param drawing the drawing
+     * @throws UsageFault if it does not
+     */
+    public void mustHold(Path file, Drawing drawing) {
+        if (!drawing(file).drawing().equals(drawing)) {
+            throw new UsageFault("The file " + file + " holds other prisms than are drawn: it was changed meanwhile."
+                    + " Save the drawing, then go on.");
+        }
+    }
+
+    /** The set's folder, for what stands beside its description. */
+    DataFolder besides() {
+        return DataFolder.holding(folder.inputs().get(AquiferReader.FILE), AquiferReader.FILE);
     }
 
     private PrismsReader reader(Consumer<String> notes) {
-        int layers = aquifer().layers().size();
-        return new PrismsReader(folder.crs(), aquifer().grid(), layers, true, surfaces, notes, notes);
+        return new PrismsReader(folder.crs(), aquifer().grid(), aquifer().layers(), true, surfaces, notes, notes);
     }
 
     /**
@@ -219,6 +270,28 @@ public final class Workbench implements AutoCloseable {
     }
 
     /**
+     * Looks where a prism does not close in a period.
+     *
+     * @param prism the prism; what lies beyond the grid is cut off
+     * @param period the period
+     * @param progress told how far the work is
+     * @return the cells furthest from balance, mean over all intervals that the period takes part of
+     * @throws org.seepledger.fault.DataFault if the prism is no polygon or lies off the grid, or the data are wrong
+     * @throws Cancelled if the work was stopped
+     */
+    public Whereabouts whereabouts(Prism prism, Period period, Progress progress) {
+        return gate.ask(progress, until -> {
+            List<Period.Part> parts = period.parts();
+            Span span = new Span(
+                    parts.get(0).interval(), parts.get(parts.size() - 1).interval() + 1);
+            List<Prism> admitted = List.of(reader(note -> {}).admitted(prism));
+            return WaterBalance.of(aquifer(), kept::around, span, admitted, WellRule.POINT, 1, until)
+                    .whereabouts()
+                    .get(0);
+        });
+    }
+
+    /**
      * Balances prisms over the whole record, with what they give to each other.
      *
      * @param prisms at least one prism; what lies beyond the grid is cut off
@@ -240,6 +313,47 @@ public final class Workbench implements AutoCloseable {
             RunWarnings words = new RunWarnings(aquifer(), balance.notes());
             notes.addAll(words.remarks(WellRule.POINT));
             return new RecordBudget(prisms, balance, words.warnings(records), notes);
+        });
+    }
+
+    /** {@return what answers questions about solutes} */
+    public SoluteBench solutes() {
+        return solutes;
+    }
+
+    /**
+     * Traces a row of a prism's budget to the stored values that it rests on.
+     *
+     * @param prism the prism; what lies beyond the grid is cut off
+     * @param row the row, as {@code PRISM/PERIOD/GROUP/ITEM/LAYER}; the layer of a total or of an item over all layers is {@code *}
+     * @param periods the periods that one of is named
+     * @param units the units of results
+     * @param most how many values are kept, those that contribute the most
+     * @param progress told how far the work is
+     * @return the number and its values
+     * @throws UsageFault if there is no such row, it has no number, or it is no sum
+     * @throws org.seepledger.fault.DataFault if the data are wrong
+     * @throws Cancelled if the work was stopped
+     */
+    public TracedNumber trace(
+            Prism prism, String row, List<Period> periods, ResultUnits units, int most, Progress progress) {
+        return gate.ask(progress, until -> {
+            List<Prism> admitted = List.of(reader(note -> {}).admitted(prism));
+            BudgetRow named = BudgetRow.of(row, aquifer(), admitted, periods);
+            Balance balance = WaterBalance.of(aquifer(), admitted, WellRule.POINT, threads(), until);
+            RowNumber number = RowNumber.of(named, balance.ledgers().get(0), units);
+            LargestLines lines = new LargestLines(most);
+            Trace.Sum sum = Trace.of(
+                    aquifer(),
+                    named.prism(),
+                    WellRule.POINT,
+                    number.traced(),
+                    named.period(),
+                    units.rateFactor(),
+                    lines,
+                    until);
+            number.mustBe(sum);
+            return new TracedNumber(row, named.period(), number.net(), units, sum.value(), sum.lines(), lines.lines());
         });
     }
 
@@ -273,6 +387,18 @@ public final class Workbench implements AutoCloseable {
     }
 
     /**
+     * {@return a map on paper of what a view shows}
+     *
+     * @param asked what it is to show
+     * @param progress told how far the work is
+     * @throws org.seepledger.fault.DataFault if the data are wrong, or the selected prism has no budget
+     * @throws Cancelled if the work was stopped
+     */
+    public Picture map(MapAsked asked, Progress progress) {
+        return new MapOnPaper(this, asked, progress).drawn();
+    }
+
+    /**
      * Reads horizontal flux for arrows on a map.
      *
      * @param layer the layer, from 0
@@ -297,7 +423,56 @@ public final class Workbench implements AutoCloseable {
         return WellPlace.of(aquifer(), interval);
     }
 
-    private static int threads() {
+    /**
+     * Cuts the aquifer along a line.
+     *
+     * @param line the line
+     * @param quantity one of {@link #quantities()}, to be shown as colour; empty for none
+     * @param interval the interval, from 0, whose begin and end water levels are those of
+     * @param progress told how far the reading is
+     * @return what stands along it; nothing where it lies off the grid
+     * @throws org.seepledger.fault.DataFault if the data are wrong
+     * @throws Cancelled if the work was stopped
+     */
+    public Profile profile(SectionLine line, Optional<MapQuantity> quantity, int interval, Progress progress) {
+        Optional<Profile.LayerValues> values =
+                quantity.map(shown -> (layer, window) -> new CellReading(aquifer(), interval, layer, window).of(shown));
+        return gate.ask(progress, until -> Profile.along(line, aquifer(), interval, interval + 1, values, until));
+    }
+
+    /**
+     * Puts prisms and wells into a section; quick, so that it follows prisms while they are drawn.
+     *
+     * @param profile what stands along its line
+     * @param prisms the prisms as they are drawn, even beyond the grid
+     * @param within how far from the line wells are shown, in length units
+     * @param progress told how far the work is
+     * @return the section, without colours, and with nothing standing out
+     * @throws org.seepledger.fault.DataFault if a prism's surface cannot be read
+     * @throws Cancelled if the work was stopped
+     */
+    public Section section(Profile profile, List<Prism> prisms, double within, Progress progress) {
+        return gate.ask(progress, until -> {
+            List<Body> bodies = new ArrayList<>();
+            for (Prism prism : prisms) {
+                until.step();
+                bodies.add(Body.of(prism, profile));
+            }
+            boolean moves = aquifer().head().filter(GriddedValues::changes).isPresent();
+            return new Section(
+                    profile,
+                    aquifer().layers(),
+                    aquifer().lengthUnit().toString(),
+                    moves ? Optional.of("interval") : Optional.empty(),
+                    bodies,
+                    NearbyWell.of(aquifer(), profile, within),
+                    within,
+                    Optional.empty(),
+                    Section.Light.NONE);
+        });
+    }
+
+    static int threads() {
         return Math.max(1, Runtime.getRuntime().availableProcessors() - 1);
     }
 

@@ -122,6 +122,13 @@ public final class Drape {
         return middle(grid.y(), grid.flipped(middle(rowEdges, i)));
     }
 
+    /** The map x and y of the upper left corner of a value's block of cells. */
+    double[] corner(int i, int j) {
+        double x = grid.x().edge(columnEdges[j]);
+        double y = grid.y().edge(grid.rows() - rowEdges[i]);
+        return new double[] {grid.mapX(x, y), grid.mapY(x, y)};
+    }
+
     Grid grid() {
         return grid;
     }

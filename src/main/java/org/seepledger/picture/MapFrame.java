@@ -49,6 +49,20 @@ public record MapFrame(Box box, double west, double north, double scale) {
     }
 
     /**
+     * {@return places in the picture, x and y in turn}
+     *
+     * @param mapXy the places' map x and y in turn
+     */
+    public double[] drawn(double[] mapXy) {
+        double[] drawn = new double[mapXy.length];
+        for (int i = 0; i < mapXy.length; i += 2) {
+            drawn[i] = x(mapXy[i]);
+            drawn[i + 1] = y(mapXy[i + 1]);
+        }
+        return drawn;
+    }
+
+    /**
      * {@return the map x of an x in the picture}
      *
      * @param x in logical pixels

@@ -52,6 +52,11 @@ final class MapSheet {
         above.add(mark);
     }
 
+    /** Adds a mark that lies on the ground, above what already does. */
+    void onGround(Mark mark) {
+        ground.add(mark);
+    }
+
     void drape(Drape drape, ValueScale scale, double opacity) {
         ground.add(drape.image(frame, scale, opacity));
     }
@@ -61,7 +66,7 @@ final class MapSheet {
         for (int i = 0; i < levels.count(); i++) {
             double[] longest = new double[0];
             for (double[] line : Contours.at(drape, levels.values().get(i))) {
-                double[] drawn = onPage(line);
+                double[] drawn = frame.drawn(line);
                 ground.add(new Mark.Line(drawn, Stroke.of(Ink.Token.TEXT, 0.7)));
                 longest = drawn.length > longest.length ? drawn : longest;
             }
@@ -144,15 +149,6 @@ final class MapSheet {
             Side side = ring.sides().get(i);
             drawn[2 * i] = frame.x(side.x());
             drawn[2 * i + 1] = frame.y(side.y());
-        }
-        return drawn;
-    }
-
-    private double[] onPage(double[] mapXy) {
-        double[] drawn = new double[mapXy.length];
-        for (int i = 0; i < mapXy.length; i += 2) {
-            drawn[i] = frame.x(mapXy[i]);
-            drawn[i + 1] = frame.y(mapXy[i + 1]);
         }
         return drawn;
     }

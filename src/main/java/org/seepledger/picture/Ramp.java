@@ -18,6 +18,15 @@ public enum Ramp {
         {0.38, -0.015, -0.085},
         {0.24, 0.015, -0.075}
     }),
+    /** From near white over rose to deep plum: concentrations. */
+    STAIN(new double[][] {
+        {0.975, 0.005, 0.012},
+        {0.84, 0.065, 0.045},
+        {0.69, 0.125, 0.035},
+        {0.53, 0.140, -0.015},
+        {0.38, 0.105, -0.050},
+        {0.25, 0.065, -0.055}
+    }),
     /** From deep violet over near white to deep ochre: what may have either sign. */
     SWING(new double[][] {
         {0.36, 0.060, -0.120},

@@ -19,6 +19,20 @@ public record Panels(double[] areas, double[] flows, double[] rates) {
         return Arrays.stream(areas).sum();
     }
 
+    /** {@return the net flow of water} */
+    public double flow() {
+        return Arrays.stream(flows).sum();
+    }
+
+    /**
+     * {@return one of them alone}
+     *
+     * @param panel which, from 0
+     */
+    public Panels only(int panel) {
+        return new Panels(new double[] {areas[panel]}, new double[] {flows[panel]}, new double[] {rates[panel]});
+    }
+
     /** {@return the net mass discharge} */
     public double discharge() {
         return Arrays.stream(rates).sum();

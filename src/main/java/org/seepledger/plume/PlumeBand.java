@@ -2,47 +2,39 @@ package org.seepledger.plume;
 
 import java.util.ArrayList;
 import java.util.HashMap;
-import java.util.IdentityHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.stream.Stream;
-import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.Block;
 import org.seepledger.aquifer.CellGeometry;
 import org.seepledger.aquifer.GriddedValues;
 import org.seepledger.aquifer.IntervalState;
 import org.seepledger.aquifer.PlacedWell;
 import org.seepledger.aquifer.Solute;
-import org.seepledger.aquifer.Source;
-import org.seepledger.aquifer.Well;
-import org.seepledger.aquifer.WellRate;
 import org.seepledger.aquifer.Window;
 import org.seepledger.balance.PrismWalk;
+import org.seepledger.balance.Span;
 import org.seepledger.progress.Progress;
 
 /** One band of rows, worked through all intervals for all solutes. */
 final class PlumeBand {
 
-    private final Aquifer aquifer;
+    private final SoluteBalance.Scope scope;
     private final Window window;
     private final List<Solute> solutes;
     private final List<PrismWalk> walks;
     private final List<List<SoluteChart>> charts;
     private final List<PlacedWell> wells;
-    private final SoluteBalance.Options options;
-    private final List<Integer> terms = new ArrayList<>();
-    private final Map<Well, Integer> sourceOfWell = new IdentityHashMap<>();
+    private final Givers givers;
 
     PlumeBand(
-            Aquifer aquifer,
+            SoluteBalance.Scope scope,
             Window window,
             List<Solute> solutes,
             List<PrismWalk> walks,
             List<List<SoluteChart>> charts,
-            List<PlacedWell> wells,
-            SoluteBalance.Options options) {
-        this.aquifer = aquifer;
+            List<PlacedWell> wells) {
+        this.scope = scope;
         this.window = window;
         this.solutes = solutes;
         this.walks = walks;
@@ -50,29 +42,20 @@ final class PlumeBand {
         this.wells = wells.stream()
                 .filter(well -> window.contains(well.row(), well.column()))
                 .toList();
-        this.options = options;
-        for (int i = 0; i < aquifer.sources().size(); i++) {
-            if (aquifer.sources().get(i) instanceof Source.Points points) {
-                for (Well well : points.wells()) {
-                    sourceOfWell.put(well, i);
-                }
-            } else {
-                terms.add(i);
-            }
-        }
+        this.givers = new Givers(scope.aquifer());
     }
 
     PlumeSums work(Progress progress) {
-        CellGeometry geometry = aquifer.geometry(window);
-        int intervals = aquifer.times().intervals();
-        PlumeSums sums = new PlumeSums(walks, charts, intervals);
+        CellGeometry geometry = scope.known().geometry(window);
+        Span span = scope.span();
+        PlumeSums sums = new PlumeSums(walks, charts, span);
         List<PrismWalk.OverBand> overBand =
                 walks.stream().map(walk -> walk.over(geometry)).toList();
         List<Matrix> matrices =
                 solutes.stream().map(solute -> Matrix.of(solute, geometry)).toList();
-        List<Reading> before = readings(0, geometry);
-        for (int interval = 0; interval < intervals; interval++) {
-            IntervalState state = aquifer.state(interval, geometry, wells);
+        List<Reading> before = readings(span.from(), geometry);
+        for (int interval = span.from(); interval < span.to(); interval++) {
+            IntervalState state = scope.known().state(interval, geometry, wells);
             List<Reading> after = readings(interval + 1, geometry);
             List<SoluteState> states = states(interval, state, matrices, before, after);
             for (int solute = 0; solute < solutes.size(); solute++) {
@@ -125,17 +108,13 @@ final class PlumeBand {
     private List<Optional<double[]>> carried(Solute solute, int interval, IntervalState state) {
         Map<Integer, double[]> bySource = new HashMap<>();
         List<Optional<double[]>> carried = new ArrayList<>();
-        Stream<Integer> givers = Stream.concat(
-                terms.stream(), state.terms().stream().skip(terms.size()).map(term -> -1));
-        Stream<Integer> wellGivers =
-                state.wells().stream().map(WellRate::well).map(well -> sourceOfWell.get(well.well()));
-        Stream.concat(givers, wellGivers).forEach(source -> {
+        for (int source : givers.of(state)) {
             GriddedValues given = solute.ofSources().get(source);
             carried.add(
                     given == null
                             ? Optional.empty()
                             : Optional.of(bySource.computeIfAbsent(source, key -> read(given, interval, state))));
-        });
+        }
         return carried;
     }
 
@@ -146,20 +125,22 @@ final class PlumeBand {
             int solute,
             SoluteState known,
             PlumeSums sums) {
-        Optional<DispersiveFaces> spreading = options.dispersion()
+        Optional<DispersiveFaces> spreading = scope.options().dispersion()
                 ? known.matrix().solute().dispersion().map(given -> new DispersiveFaces(state, known.matrix(), given))
                 : Optional.empty();
-        double length = aquifer.times().length(interval);
+        double length = scope.aquifer().times().length(interval);
+        IntervalState field = CarriedField.of(state, known);
         for (int prism = 0; prism < walks.size(); prism++) {
             SoluteTally tally = sums.tally(interval, prism, solute);
             SoluteChart chart = charts.get(prism).get(solute);
             SoluteBookings.Counting counting = new SoluteBookings.Counting(
                     walks.get(prism).firstLayer(),
-                    interval == 0,
-                    options.above().orElse(Double.POSITIVE_INFINITY));
+                    interval == scope.span().from(),
+                    scope.options().above().orElse(Double.POSITIVE_INFINITY));
             SoluteBookings bookings = new SoluteBookings(chart, state, known, tally, length, counting);
             overBand.get(prism).book(state, bookings);
             bookings.finish();
+            overBand.get(prism).book(field, new AlongCells(field, tally.alongCells()));
         }
         spreading.ifPresent(faces -> bookSpreading(faces, interval, state, overBand, solute, known, sums));
     }

@@ -30,6 +30,15 @@ public final class Stock {
     private double leastLimit = Double.POSITIVE_INFINITY;
     private double greatestLimit = Double.NEGATIVE_INFINITY;
 
+    /** {@return what is held at an instant that was not asked for: no numbers} */
+    static Stock notGiven() {
+        Stock stock = new Stock();
+        for (int i = 0; i < COUNT; i++) {
+            stock.sums.add(i, Double.NaN);
+        }
+        return stock;
+    }
+
     /**
      * Counts a part of a cell.
      *

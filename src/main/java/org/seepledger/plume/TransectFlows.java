@@ -1,16 +1,21 @@
 package org.seepledger.plume;
 
 import java.util.ArrayList;
+import java.util.IntSummaryStatistics;
 import java.util.List;
+import java.util.function.Function;
+import java.util.stream.IntStream;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.Block;
 import org.seepledger.aquifer.CellGeometry;
 import org.seepledger.aquifer.FaceFlows;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.IntervalState;
+import org.seepledger.aquifer.KnownCells;
 import org.seepledger.aquifer.Solute;
 import org.seepledger.aquifer.Window;
 import org.seepledger.balance.Bands;
+import org.seepledger.balance.Span;
 import org.seepledger.prism.Pieces;
 import org.seepledger.prism.Transect;
 import org.seepledger.progress.Progress;
@@ -21,11 +26,18 @@ import org.seepledger.progress.Progress;
  */
 public final class TransectFlows {
 
-    private final Aquifer aquifer;
+    private final KnownCells known;
+    private final Span span;
+    private final Window window;
     private final List<Crossing> crossings = new ArrayList<>();
 
-    private TransectFlows(Aquifer aquifer, List<Solute> solutes, List<Transect> transects) {
-        this.aquifer = aquifer;
+    private TransectFlows(
+            Aquifer aquifer,
+            Function<Window, KnownCells> known,
+            Span span,
+            List<Solute> solutes,
+            List<Transect> transects) {
+        this.span = span;
         for (Transect transect : transects) {
             Pieces pieces = transect.cut(aquifer.grid());
             for (Solute solute : solutes) {
@@ -34,9 +46,12 @@ public final class TransectFlows {
                         solute,
                         pieces,
                         aquifer.layers().size(),
-                        aquifer.times().intervals()));
+                        aquifer.times().intervals(),
+                        span));
             }
         }
+        this.window = joint();
+        this.known = known.apply(window);
     }
 
     /**
@@ -51,12 +66,52 @@ public final class TransectFlows {
      */
     public static List<Crossing> of(
             Aquifer aquifer, List<Solute> solutes, List<Transect> transects, Progress progress) {
-        TransectFlows flows = new TransectFlows(aquifer, solutes, transects);
-        List<Window> bands = Bands.of(aquifer.grid().window(), aquifer.layers().size());
-        progress.begin(
-                "crossing transects", (long) bands.size() * aquifer.times().intervals());
+        return of(aquifer, window -> aquifer, Span.all(aquifer.times()), solutes, transects, progress);
+    }
+
+    /**
+     * {@return what crosses in some intervals, by transect and for each by solute; no numbers for other intervals}
+     *
+     * @param aquifer the aquifer
+     * @param known what is known of its cells, by the transects' joint window
+     * @param span the intervals
+     * @param solutes at least one solute, each with a concentration
+     * @param transects at least one line within the grid
+     * @param progress told of each band and interval
+     * @throws org.seepledger.fault.DataFault if the data are wrong
+     * @throws org.seepledger.progress.Cancelled if the work was stopped
+     */
+    public static List<Crossing> of(
+            Aquifer aquifer,
+            Function<Window, KnownCells> known,
+            Span span,
+            List<Solute> solutes,
+            List<Transect> transects,
+            Progress progress) {
+        TransectFlows flows = new TransectFlows(aquifer, known, span, solutes, transects);
+        List<Window> bands = Bands.of(flows.window, aquifer.layers().size());
+        progress.begin("crossing transects", (long) bands.size() * span.count());
         bands.forEach(band -> flows.work(band, progress));
         return flows.crossings;
+    }
+
+    /** The smallest window that holds the cells of all pieces. */
+    private Window joint() {
+        int[] rows = cells(Pieces::row);
+        int[] columns = cells(Pieces::column);
+        return new Window(rows[0], columns[0], rows[1] - rows[0] + 1, columns[1] - columns[0] + 1);
+    }
+
+    private interface OfPiece {
+        int at(Pieces pieces, int piece);
+    }
+
+    private int[] cells(OfPiece place) {
+        IntSummaryStatistics all = crossings.stream()
+                .flatMapToInt(crossing ->
+                        IntStream.range(0, crossing.pieces().count()).map(piece -> place.at(crossing.pieces(), piece)))
+                .summaryStatistics();
+        return new int[] {all.getMin(), all.getMax()};
     }
 
     private void work(Window rows, Progress progress) {
@@ -64,11 +119,10 @@ public final class TransectFlows {
                 .filter(crossing -> crossing.pieces().firstFrom(rows.row())
                         < crossing.pieces().firstFrom(rows.rowEnd()))
                 .toList();
-        int intervals = aquifer.times().intervals();
-        CellGeometry geometry = here.isEmpty() ? null : aquifer.geometry(rows);
-        for (int interval = 0; interval < intervals; interval++) {
+        CellGeometry geometry = here.isEmpty() ? null : known.geometry(rows);
+        for (int interval = span.from(); interval < span.to(); interval++) {
             if (geometry != null) {
-                IntervalState state = aquifer.state(interval, geometry, List.of());
+                IntervalState state = known.state(interval, geometry, List.of());
                 int at = interval;
                 here.forEach(crossing -> cross(crossing, at, state, rows));
             }

@@ -2,6 +2,7 @@ package org.seepledger.report;
 
 import java.util.List;
 import java.util.function.DoubleFunction;
+import java.util.function.UnaryOperator;
 import org.seepledger.io.result.ResultUnits;
 import org.seepledger.unit.Figures;
 import org.seepledger.unit.Measure;
@@ -44,22 +45,46 @@ public final class Wording {
     }
 
     /**
+     * {@return the wording of the window, with numbers in the form that its user wants}
+     *
+     * @param units the units to give
+     * @param form turns a typeset number into that form
+     */
+    public static Wording typeset(ResultUnits units, UnaryOperator<String> form) {
+        return new Wording(
+                units,
+                value -> form.apply(Figures.typeset(value)),
+                value -> form.apply(Figures.typesetPercent(value)),
+                true);
+    }
+
+    /**
      * {@return a mean rate with its unit}
      *
-     * @param volume length³
+     * @param volume length³; kilograms in a solute's budget
      * @param duration the time that it took, in time units
      */
     public String rate(double volume, double duration) {
-        return number.apply(volume / duration * units.rateFactor()) + space + unit(units.rate());
+        return quantity(volume / duration * units.rateFactor(), unit(units.rate()));
     }
 
     /**
      * {@return a volume with its unit}
      *
-     * @param volume length³
+     * @param volume length³; kilograms in a solute's budget
      */
     public String volume(double volume) {
-        return number.apply(volume * units.volumeFactor()) + space + unit(units.volume());
+        return quantity(volume * units.volumeFactor(), unit(units.volume()));
+    }
+
+    /**
+     * {@return a number with a unit}
+     *
+     * @param value the number
+     * @param unit the unit as it is written
+     */
+    public String quantity(double value, String unit) {
+        return number.apply(value) + space + unit;
     }
 
     /**

@@ -3,12 +3,14 @@ package org.seepledger.sketch;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.function.Consumer;
 import java.util.function.UnaryOperator;
+import java.util.stream.Collectors;
 
 /**
  * The prisms that a person has drawn, in their order. Every edit is a new drawing; what it leaves alone is shared.
@@ -29,6 +31,13 @@ public record Drawing(List<Shape> shapes) {
                 throw new Refusal("There is a prism \"" + shape.name() + "\" already.");
             }
         }
+    }
+
+    /** {@return the surfaces that its shapes name, each once} */
+    public Set<Limit.Surface> surfaces() {
+        return shapes.stream()
+                .flatMap(shape -> shape.reach().surfaces().stream())
+                .collect(Collectors.toCollection(LinkedHashSet::new));
     }
 
     /**

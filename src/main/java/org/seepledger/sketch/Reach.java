@@ -1,6 +1,8 @@
 package org.seepledger.sketch;
 
+import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 import org.seepledger.aquifer.GriddedValues;
 import org.seepledger.prism.VerticalRange;
 
@@ -44,6 +46,11 @@ public sealed interface Reach {
                     && !(upper.height() > lower.height())) {
                 throw new Refusal("The top lies above the bottom.");
             }
+            if (top.orElse(null) instanceof Limit.Layer upper
+                    && bottom.orElse(null) instanceof Limit.Layer lower
+                    && upper.index() > lower.index()) {
+                throw new Refusal("The top lies above the bottom.");
+            }
         }
     }
 
@@ -57,21 +64,39 @@ public sealed interface Reach {
     default VerticalRange on(int layers, Surfaces surfaces) {
         if (this instanceof Between between) {
             return new VerticalRange.Elevations(
-                    between.top().map(limit -> values(limit, "top", surfaces)),
-                    between.bottom().map(limit -> values(limit, "bottom", surfaces)));
+                    between.top().map(limit -> values(limit, "top", layers, surfaces)),
+                    between.bottom().map(limit -> values(limit, "bottom", layers, surfaces)));
         }
         if (this instanceof Layers stack) {
-            if (stack.last() >= layers) {
-                throw new Refusal("The grid has " + layers + (layers == 1 ? " layer." : " layers."));
-            }
+            check(stack.last(), layers);
             return new VerticalRange.Layers(stack.first(), stack.last());
         }
         return new VerticalRange.Layers(0, layers - 1);
     }
 
-    private static GriddedValues values(Limit limit, String lid, Surfaces surfaces) {
+    /** {@return the surfaces that it names} */
+    default List<Limit.Surface> surfaces() {
+        return this instanceof Between between
+                ? Stream.of(between.top(), between.bottom())
+                        .flatMap(Optional::stream)
+                        .filter(Limit.Surface.class::isInstance)
+                        .map(Limit.Surface.class::cast)
+                        .toList()
+                : List.of();
+    }
+
+    private static GriddedValues values(Limit limit, String lid, int layers, Surfaces surfaces) {
+        if (limit instanceof Limit.Layer layer) {
+            check(layer.index(), layers);
+        }
         return limit instanceof Limit.Elevation elevation
                 ? GriddedValues.constant(elevation.height())
-                : surfaces.read((Limit.Surface) limit, lid);
+                : surfaces.read(limit, lid);
+    }
+
+    private static void check(int layer, int layers) {
+        if (layer >= layers) {
+            throw new Refusal("The grid has " + layers + (layers == 1 ? " layer." : " layers."));
+        }
     }
 }

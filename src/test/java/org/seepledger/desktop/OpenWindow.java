@@ -11,6 +11,7 @@ import javafx.scene.input.KeyCode;
 import javafx.stage.Stage;
 import org.seepledger.desktop.port.GivenAnswers;
 import org.seepledger.desktop.task.BackgroundTasks;
+import org.seepledger.desktop.task.Tasks;
 import org.testfx.api.FxRobot;
 import org.testfx.api.FxToolkit;
 import org.testfx.util.WaitForAsyncUtils;
@@ -24,7 +25,7 @@ public final class OpenWindow implements AutoCloseable {
     public final FxRobot robot = new FxRobot();
 
     /** What the machine answers. */
-    public final GivenAnswers answers = new GivenAnswers();
+    public final GivenAnswers answers;
 
     private final BackgroundTasks tasks = new BackgroundTasks(Platform::runLater);
     private Assembly assembly;
@@ -37,11 +38,24 @@ public final class OpenWindow implements AutoCloseable {
      * @param height of the scene, in logical pixels
      */
     public OpenWindow(double width, double height) {
+        this(width, height, new GivenAnswers());
+    }
+
+    /**
+     * Opens the window again on the same machine.
+     *
+     * @param width of the scene, in logical pixels
+     * @param height of the scene, in logical pixels
+     * @param answers what the machine answers and has kept
+     */
+    OpenWindow(double width, double height, GivenAnswers answers) {
+        this.answers = answers;
         try {
             stage = FxToolkit.registerPrimaryStage();
             FxToolkit.setupFixture(() -> {
                 assembly = new Assembly(
-                        new Assembly.Outside(tasks, answers, answers, answers, answers), List.of(Path.of("")));
+                        new Assembly.Outside(tasks, answers, answers, answers, answers, answers, answers),
+                        List.of(Path.of("")));
                 stage.setScene(assembly.scene());
                 stage.setX(0);
                 stage.setY(0);
@@ -72,7 +86,7 @@ public final class OpenWindow implements AutoCloseable {
     }
 
     /** Chooses a value from a choice box, by click and keys. */
-    <T> void choose(String selector, T value) {
+    public <T> void choose(String selector, T value) {
         @SuppressWarnings("unchecked")
         ChoiceBox<T> box = robot.lookup(selector).queryAs(ChoiceBox.class);
         robot.clickOn(box);
@@ -85,13 +99,18 @@ public final class OpenWindow implements AutoCloseable {
     }
 
     /** Lets the window come to rest. */
-    void settle() {
+    public void settle() {
         WaitForAsyncUtils.sleep(350, TimeUnit.MILLISECONDS);
         WaitForAsyncUtils.waitForFxEvents();
     }
 
     Assembly assembly() {
         return assembly;
+    }
+
+    /** {@return where work is done} */
+    Tasks tasks() {
+        return tasks;
     }
 
     Stage stage() {

@@ -28,4 +28,28 @@ public final class Requests {
                 false,
                 ReportRequest.dated(LocalDate.of(2024, 5, 31)));
     }
+
+    /** The solute budget of prisms and transects, cut at the grid's edge. */
+    public static PlumeRequest plume(
+            Path set, Path prisms, Path out, Periods.Every every, boolean dispersion, Optional<Path> transects) {
+        return new PlumeRequest(
+                set,
+                prisms,
+                out,
+                every,
+                Optional.empty(),
+                10,
+                Optional.empty(),
+                Optional.empty(),
+                Optional.empty(),
+                WellRule.POINT,
+                dispersion,
+                Optional.empty(),
+                transects,
+                Optional.empty(),
+                true,
+                2,
+                false,
+                ReportRequest.dated(LocalDate.of(2024, 5, 31)));
+    }
 }

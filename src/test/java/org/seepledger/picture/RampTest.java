@@ -53,11 +53,12 @@ class RampTest {
         assertThat(greatest / least).isLessThan(2);
     }
 
-    @Test
-    void aSequentialRampGetsDarkerByEvenSteps() {
-        double mean = (lightness(Ramp.DEPTH, 0) - lightness(Ramp.DEPTH, 1)) / STEPS;
+    @ParameterizedTest
+    @EnumSource(names = {"DEPTH", "STAIN"})
+    void aSequentialRampGetsDarkerByEvenSteps(Ramp ramp) {
+        double mean = (lightness(ramp, 0) - lightness(ramp, 1)) / STEPS;
         for (int i = 0; i < STEPS; i++) {
-            double step = lightness(Ramp.DEPTH, (double) i / STEPS) - lightness(Ramp.DEPTH, (i + 1.0) / STEPS);
+            double step = lightness(ramp, (double) i / STEPS) - lightness(ramp, (i + 1.0) / STEPS);
             assertThat(step).isBetween(0.5 * mean, 1.5 * mean);
         }
     }

@@ -51,8 +51,8 @@ public final class DraftFiles {
         this.model = model;
         this.dialogs = dialogs;
         this.questions = questions;
-        this.keeping = tasks.latest("keeping the drawing");
-        this.files = tasks.latest("files of the drawing");
+        this.keeping = tasks.latest("task.keeping");
+        this.files = tasks.latest("task.files");
         model.version().addListener((version, before, after) -> keep());
     }
 
@@ -70,7 +70,7 @@ public final class DraftFiles {
         lastKept = current;
         model.begin(kept, current, surfaces);
         if (!current.equals(kept)) {
-            model.session().status().set(Words.of("restored"));
+            model.session().notices().warn(Words.of("restored"));
         }
     }
 
@@ -100,7 +100,7 @@ public final class DraftFiles {
                 done -> lastKept = done,
                 fault -> {
                     lastKept = drawing;
-                    model.session().status().set(Words.of("kept.not", FaultWords.of(fault)));
+                    model.session().notices().warn(Words.of("kept.not", FaultWords.of(fault)));
                 });
     }
 
@@ -135,11 +135,11 @@ public final class DraftFiles {
                         model.kept(drawing);
                     }
                     model.session()
-                            .status()
-                            .set(Words.of("saved", drawing.shapes().size(), written));
+                            .notices()
+                            .done(Words.of("saved", drawing.shapes().size(), written));
                     done.accept(written);
                 },
-                fault -> model.session().status().set(FaultWords.of(fault)));
+                fault -> model.session().notices().refuse(FaultWords.of(fault)));
     }
 
     /** Adds the prisms of a file that is asked for; a name that is taken gets a number. */
@@ -151,7 +151,7 @@ public final class DraftFiles {
                             return set.workbench().drawing(file);
                         },
                         this::add,
-                        fault -> model.session().status().set(FaultWords.of(fault)))));
+                        fault -> model.session().notices().refuse(FaultWords.of(fault)))));
     }
 
     private void add(DrawingFile file) {
@@ -167,8 +167,8 @@ public final class DraftFiles {
         if (added) {
             String notes = String.join(" ", file.notes());
             model.session()
-                    .status()
-                    .set(Words.of("imported", shapes.size(), notes).strip());
+                    .notices()
+                    .done(Words.of("imported", shapes.size(), notes).strip(), Words.of("action.undo"), model::undo);
         }
     }
 

@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.function.Function;
 import java.util.stream.IntStream;
+import javafx.beans.binding.Bindings;
 import javafx.beans.property.Property;
 import javafx.beans.value.ObservableValue;
 import javafx.scene.control.Button;
@@ -25,13 +26,17 @@ import org.seepledger.unit.Measure;
 final class LedgerChoices extends VBox {
 
     private final Reading reading;
+    private final LedgerSheets sheets;
     private final ChoiceBox<String> units = new ChoiceBox<>();
     private boolean filling;
 
     LedgerChoices(LedgerModel model) {
         this.reading = model.reading();
+        this.sheets = model.sheets();
         getStyleClass().add("sl-choices");
         Label belongs = line("ledger-belongs", model.belongs(), "sl-belongs");
+        Label closure = line("ledger-closure", model.closure(), "sl-small");
+        closure.managedProperty().bind(closure.textProperty().isNotEmpty());
         Label notes = line("ledger-notes", model.notes(), "sl-small", "sl-warning");
         notes.managedProperty().bind(notes.textProperty().isNotEmpty());
         FlowPane choices = new FlowPane(
@@ -39,16 +44,18 @@ final class LedgerChoices extends VBox {
                 6,
                 periods(),
                 months(),
-                box("ledger-amounts", List.of(false, true), LedgerChoices::amounts, reading.volumes()),
+                amounts(model),
                 units,
                 box("ledger-arrangement", List.of(Arrangement.values()), LedgerChoices::arranged, model.arrangement()),
-                copy(model));
-        getChildren().addAll(belongs, notes, choices);
+                copy(model),
+                origin(model));
+        getChildren().addAll(belongs, closure, notes, choices);
         units.setId("ledger-unit");
         units.setMinWidth(96);
         units.setConverter(converter(LedgerChoices::unit));
         units.setOnAction(chosen -> take());
         reading.changes().addListener((changes, before, after) -> fill());
+        model.solute().addListener((solute, before, after) -> fill());
         fill();
     }
 
@@ -67,6 +74,16 @@ final class LedgerChoices extends VBox {
         copy.setTooltip(new Tooltip(Words.of("ledger.copy.tip")));
         copy.setOnAction(pressed -> model.copy());
         return copy;
+    }
+
+    private static Button origin(LedgerModel model) {
+        Button origin = new Button(Words.of("ledger.origin.button"));
+        origin.setId("ledger-origin");
+        origin.setTooltip(new Tooltip(Words.of("ledger.origin")));
+        origin.disableProperty()
+                .bind(Bindings.createBooleanBinding(() -> model.chosen().get().isEmpty(), model.chosen()));
+        origin.setOnAction(pressed -> model.askOrigin());
+        return origin;
     }
 
     private ChoiceBox<Every> periods() {
@@ -97,8 +114,20 @@ final class LedgerChoices extends VBox {
         return Wording.raised(Measure.of(unit));
     }
 
-    private static String amounts(boolean volumes) {
-        return Words.of(volumes ? "ledger.volumes" : "ledger.rates");
+    /** Rates, or what went through in all: volumes of water, masses of a solute. */
+    private ChoiceBox<Boolean> amounts(LedgerModel model) {
+        ChoiceBox<Boolean> box = box("ledger-amounts", List.of(false, true), this::amounts, reading.volumes());
+        model.solute().addListener((solute, before, after) -> {
+            if (before.isEmpty() != after.isEmpty()) {
+                box.getItems().setAll(false, true);
+                box.setValue(reading.volumes().get());
+            }
+        });
+        return box;
+    }
+
+    private String amounts(boolean all) {
+        return Words.of(!all ? "ledger.rates" : sheets.ofSolute() ? "ledger.masses" : "ledger.volumes");
     }
 
     private static String arranged(Arrangement arrangement) {
@@ -143,8 +172,8 @@ final class LedgerChoices extends VBox {
 
     private void fill() {
         filling = true;
-        units.getItems().setAll(reading.units());
-        String unit = reading.unit().get();
+        units.getItems().setAll(sheets.units());
+        String unit = sheets.unit().get();
         units.setValue(
                 unit.isEmpty() && !units.getItems().isEmpty() ? units.getItems().get(0) : unit);
         filling = false;
@@ -152,7 +181,7 @@ final class LedgerChoices extends VBox {
 
     private void take() {
         if (!filling && units.getValue() != null) {
-            reading.unit().set(units.getValue());
+            sheets.unit().set(units.getValue());
         }
     }
 }

@@ -12,54 +12,55 @@ import javafx.beans.property.SimpleObjectProperty;
 import javafx.collections.FXCollections;
 import javafx.collections.ObservableList;
 import org.seepledger.aquifer.Layer;
-import org.seepledger.balance.Periods;
-import org.seepledger.desktop.budget.BudgetShown;
 import org.seepledger.desktop.budget.LiveBudget;
 import org.seepledger.desktop.budget.Reading;
 import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.session.OpenSet;
+import org.seepledger.desktop.session.RowAsked;
 import org.seepledger.desktop.session.Session;
+import org.seepledger.desktop.solute.LivePlume;
+import org.seepledger.desktop.solute.MassReading;
 import org.seepledger.desktop.task.PaneState;
+import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.desktop.words.Words;
-import org.seepledger.ledger.Period;
-import org.seepledger.prism.Prism;
 
 /** The ledger of the selected prism: its rows, which geometry and time they belong to, and which face is lit up. */
 public final class LedgerModel {
 
     private final Session session;
-    private final LiveBudget live;
-    private final Reading reading;
+    private final LedgerSheets sheets;
     private final CopyBoard copies;
     private final ObservableList<LedgerRow> rows = FXCollections.observableArrayList();
     private final ReadOnlyStringWrapper belongs = new ReadOnlyStringWrapper("");
     private final ReadOnlyStringWrapper notes = new ReadOnlyStringWrapper("");
     private final ReadOnlyStringWrapper unit = new ReadOnlyStringWrapper("");
+    private final ReadOnlyStringWrapper massUnit = new ReadOnlyStringWrapper("");
+    private final ReadOnlyStringWrapper closure = new ReadOnlyStringWrapper("");
     private final ReadOnlyObjectWrapper<PaneState> state = new ReadOnlyObjectWrapper<>(PaneState.READY);
     private final ObjectProperty<Arrangement> arrangement = new SimpleObjectProperty<>(Arrangement.ITEMS);
     private final ObjectProperty<Order> order = new SimpleObjectProperty<>(Order.AS_DRAWN);
+    private final ObjectProperty<Optional<LedgerRow>> chosen = new SimpleObjectProperty<>(Optional.empty());
     private double largest;
     private String whose = "";
+    private String copyTitle = "";
 
     /**
      * Makes the model.
      *
      * @param session what the window looks at
-     * @param live the budgets
+     * @param live the water's budgets
      * @param reading how figures are read
+     * @param plumes the solutes' budgets
+     * @param masses how masses are read
      * @param copies where copies go
      */
-    public LedgerModel(Session session, LiveBudget live, Reading reading, CopyBoard copies) {
+    public LedgerModel(
+            Session session, LiveBudget live, Reading reading, LivePlume plumes, MassReading masses, CopyBoard copies) {
         this.session = session;
-        this.live = live;
-        this.reading = reading;
+        this.sheets = new LedgerSheets(session, live, reading, plumes, masses);
         this.copies = copies;
-        live.known().addListener((known, before, after) -> show());
-        live.now().addListener((now, before, after) -> showState());
-        live.record().addListener((record, before, after) -> showState());
-        session.selected().addListener((selected, before, after) -> show());
-        session.interval().addListener((interval, before, after) -> show());
-        reading.changes().addListener((changes, before, after) -> show());
+        sheets.causes().forEach(cause -> cause.addListener(changed -> show()));
+        sheets.states().forEach(cause -> cause.addListener(changed -> showState()));
         arrangement.addListener((arranged, before, after) -> show());
         order.addListener((ordered, before, after) -> show());
         show();
@@ -82,12 +83,22 @@ public final class LedgerModel {
 
     /** Asks the map to begin a prism. */
     public void draw() {
-        live.draw();
+        sheets.live().draw();
     }
 
     /** {@return the unit of the numbers} */
     public ReadOnlyStringProperty unit() {
         return unit.getReadOnlyProperty();
+    }
+
+    /** {@return how a solute's budget closes; empty for water's} */
+    public ReadOnlyStringProperty closure() {
+        return closure.getReadOnlyProperty();
+    }
+
+    /** {@return the solute whose budget it is; empty for water's} */
+    public ReadOnlyStringProperty solute() {
+        return session.solute();
     }
 
     /** {@return which state the pane is in} */
@@ -107,7 +118,11 @@ public final class LedgerModel {
 
     /** {@return how figures are read} */
     public Reading reading() {
-        return reading;
+        return sheets.reading();
+    }
+
+    LedgerSheets sheets() {
+        return sheets;
     }
 
     /**
@@ -128,6 +143,20 @@ public final class LedgerModel {
         session.lit().set(row.isFace() ? row.item() : "");
     }
 
+    /** {@return the row that is chosen, if one is that has a number} */
+    public ObjectProperty<Optional<LedgerRow>> chosen() {
+        return chosen;
+    }
+
+    /** Asks where the number of the chosen row comes from. */
+    public void askOrigin() {
+        chosen.get()
+                .filter(row -> row.kind() != LedgerRow.Kind.HEADING)
+                .ifPresentOrElse(
+                        row -> session.asked().set(Optional.of(new RowAsked(row.group(), row.item(), row.layer()))),
+                        () -> session.notices().refuse(Words.of("ledger.origin.none")));
+    }
+
     /** {@return the first row about the face that is lit up, if there is one} */
     public Optional<LedgerRow> lit() {
         String item = session.lit().get();
@@ -145,9 +174,9 @@ public final class LedgerModel {
     /** Copies the rows with their units, in full precision. */
     public void copy() {
         if (!rows.isEmpty() && !belongs.get().isEmpty()) {
-            LedgerCopy copy = new LedgerCopy(belongs.get(), unit.get(), rows);
+            LedgerCopy copy = new LedgerCopy(copyTitle, unit.get(), massUnit.get(), rows);
             copies.table(copy.tabSeparated(), copy.html());
-            session.status().set(Words.of("ledger.copied", belongs.get()));
+            session.notices().done(Words.of("ledger.copied", belongs.get()));
         }
     }
 
@@ -160,47 +189,58 @@ public final class LedgerModel {
         return largest == 0 || Double.isNaN(value) ? 0 : value / largest;
     }
 
+    /**
+     * {@return a number of a row, as it is to be read}
+     *
+     * @param row the row
+     * @param value the number
+     */
+    public String text(LedgerRow row, double value) {
+        return session.numbers().get().of(row.text(value));
+    }
+
     private void show() {
-        Optional<OpenSet> set = session.set().get();
-        Optional<Prism> prism = session.selectedPrism();
-        if (set.isPresent() && prism.isPresent()) {
-            Period period = reading.period(set.get(), session.interval().get());
-            live.known()
-                    .get()
-                    .budget(prism.get(), period)
-                    .ifPresentOrElse(shown -> show(set.get(), shown), this::clear);
-        } else {
-            clear();
-        }
+        session.set()
+                .get()
+                .ifPresentOrElse(
+                        set -> sheets.now().ifPresentOrElse(sheet -> show(set, sheet), this::clear), this::clear);
         showState();
     }
 
-    private void show(OpenSet set, BudgetShown shown) {
+    private void showState() {
+        state.set(sheets.state());
+        belongs.set(state.get().phase() == PaneState.Phase.FAILED ? "" : whose);
+    }
+
+    private void show(OpenSet set, LedgerSheet sheet) {
         List<String> layers = set.aquifer().layers().stream().map(Layer::name).toList();
-        List<LedgerRow> arranged =
-                new LedgerRows(shown.budget(), layers, reading.shown(set), order.get()).arranged(arrangement.get());
+        List<LedgerRow> arranged = new LedgerRows(sheet, layers, order.get()).arranged(arrangement.get());
         largest = arranged.stream()
                 .filter(row -> row.kind() == LedgerRow.Kind.ENTRY)
                 .flatMapToDouble(row -> DoubleStream.of(row.inflow(), row.outflow()))
                 .filter(value -> !Double.isNaN(value))
                 .max()
                 .orElse(0);
+        unit.set(sheet.unitName());
+        massUnit.set(sheet.ofSolute().map(LedgerSheet.OfSolute::massUnit).orElse(""));
+        closure.set(session.numbers()
+                .get()
+                .of(sheet.ofSolute().map(LedgerSheet.OfSolute::closure).orElse("")));
+        whose = whose(set, sheet, session.numbers().get());
+        copyTitle = whose(set, sheet, NumberForm.SPACE_POINT);
+        notes.set(String.join(" ", sheet.shown().notes()));
         rows.setAll(arranged);
-        unit.set(reading.unitName(set));
-        whose = shown.whose(set);
-        notes.set(String.join(" ", shown.notes()));
+    }
+
+    private String whose(OpenSet set, LedgerSheet sheet, NumberForm form) {
+        String geometry = sheet.shown().whose(set, form);
+        return sheets.ofSolute() ? Words.of("ledger.of.solute", session.solute().get(), geometry) : geometry;
     }
 
     private void clear() {
         rows.clear();
         whose = "";
         notes.set("");
-    }
-
-    private void showState() {
-        boolean quick = reading.every().get() == Periods.Every.INTERVAL;
-        PaneState now = quick ? live.now().get() : live.record().get();
-        state.set(now);
-        belongs.set(now.phase() == PaneState.Phase.FAILED ? "" : whose);
+        closure.set("");
     }
 }

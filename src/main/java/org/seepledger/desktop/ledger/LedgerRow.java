@@ -1,5 +1,7 @@
 package org.seepledger.desktop.ledger;
 
+import java.util.EnumSet;
+import java.util.Set;
 import org.seepledger.ledger.Group;
 import org.seepledger.ledger.Line;
 import org.seepledger.unit.Figures;
@@ -14,15 +16,30 @@ import org.seepledger.unit.Figures;
  * @param label what it is called here
  * @param inflow what comes in
  * @param outflow what goes out
- * @param net what comes in less what goes out, or a total
+ * @param net what comes in less what goes out, a total, or what is held
+ * @param low the net with non-detects as 0
+ * @param high the net with non-detects as their limit
  */
 public record LedgerRow(
-        Kind kind, Group group, String item, int layer, String label, double inflow, double outflow, double net) {
+        Kind kind,
+        Group group,
+        String item,
+        int layer,
+        String label,
+        double inflow,
+        double outflow,
+        double net,
+        double low,
+        double high) {
+
+    private static final Set<Group> FACES = EnumSet.of(Group.SIDE, Group.LID, Group.DISPERSION);
 
     /** The kinds of rows. */
     public enum Kind {
         /** Begins a section. */
         HEADING,
+        /** What is held: one number, a mass. */
+        HELD,
         /** What comes in and goes out of one item. */
         ENTRY,
         /** A total: one number. */
@@ -32,7 +49,16 @@ public record LedgerRow(
     }
 
     static LedgerRow heading(Group group, int layer, String label) {
-        return new LedgerRow(Kind.HEADING, group, "", layer, label, Double.NaN, Double.NaN, Double.NaN);
+        return one(Kind.HEADING, group, "", layer, label, Double.NaN);
+    }
+
+    /** A row of one number without a bracket. */
+    static LedgerRow one(Kind kind, Group group, String item, int layer, String label, double value) {
+        return new LedgerRow(kind, group, item, layer, label, Double.NaN, Double.NaN, value, Double.NaN, Double.NaN);
+    }
+
+    LedgerRow bracketed(double atZero, double atLimit) {
+        return new LedgerRow(kind, group, item, layer, label, inflow, outflow, net, atZero, atLimit);
     }
 
     /**
@@ -41,8 +67,8 @@ public record LedgerRow(
      * @param value the number
      */
     public String text(double value) {
-        boolean oneNumber = kind == Kind.TOTAL || kind == Kind.PERCENTAGE;
-        if (kind == Kind.HEADING || oneNumber && Double.compare(value, net) != 0) {
+        boolean oneNumber = kind != Kind.ENTRY;
+        if (kind == Kind.HEADING || oneNumber && Double.isNaN(value) && !Double.isNaN(net)) {
             return "";
         }
         return kind == Kind.PERCENTAGE ? Figures.typesetPercent(value) : Figures.tabular(value);
@@ -50,6 +76,6 @@ public record LedgerRow(
 
     /** {@return whether it is about a face that can be lit up on the map} */
     public boolean isFace() {
-        return kind == Kind.ENTRY && !item.isEmpty() && (group == Group.SIDE || group == Group.LID);
+        return kind == Kind.ENTRY && !item.isEmpty() && FACES.contains(group);
     }
 }

@@ -1,12 +1,16 @@
 package org.seepledger.desktop.ledger;
 
+import java.util.Optional;
 import javafx.collections.ListChangeListener;
 import javafx.css.PseudoClass;
 import javafx.scene.control.Button;
+import javafx.scene.control.ContextMenu;
 import javafx.scene.control.Label;
+import javafx.scene.control.MenuItem;
 import javafx.scene.control.TableColumn;
 import javafx.scene.control.TableRow;
 import javafx.scene.control.TableView;
+import javafx.scene.control.Tooltip;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyCodeCombination;
 import javafx.scene.input.KeyCombination;
@@ -19,6 +23,7 @@ public final class LedgerView extends BorderPane {
 
     private static final KeyCombination COPY = new KeyCodeCombination(KeyCode.C, KeyCombination.SHORTCUT_DOWN);
     private static final PseudoClass HEADING = PseudoClass.getPseudoClass("heading");
+    private static final double BRACKET = 84;
     private static final PseudoClass TOTAL = PseudoClass.getPseudoClass("total");
 
     private final LedgerModel model;
@@ -36,27 +41,36 @@ public final class LedgerView extends BorderPane {
         getStyleClass().add("sl-ledger");
         setTop(new LedgerChoices(model));
         buildTable();
-        setCenter(new StatePane(table, model.state()).withAction(Words.of("budget.draw"), model::draw));
+        BorderPane sheet = new BorderPane(table);
+        sheet.setBottom(new LedgerFoot(model));
+        setCenter(new StatePane(sheet, model.state()).withAction(Words.of("budget.draw"), model::draw));
     }
 
     private void buildTable() {
         table.setId("ledger-table");
-        table.setItems(model.rows());
+        table.setItems(model.rows().filtered(row -> !LedgerFoot.isTotal(row)));
         table.setColumnResizePolicy(TableView.CONSTRAINED_RESIZE_POLICY_FLEX_LAST_COLUMN);
         table.setPlaceholder(new Label());
         table.getColumns().add(nameColumn());
         table.getColumns().add(numbers("ledger.in", Order.LARGEST_IN, LedgerRow::inflow));
         table.getColumns().add(numbers("ledger.out", Order.LARGEST_OUT, LedgerRow::outflow));
         table.getColumns().add(numbers("ledger.net", Order.LARGEST_NET, LedgerRow::net));
+        table.getColumns().add(bracket("ledger.zero", "ledger.zero.tip", LedgerRow::low));
+        table.getColumns().add(bracket("ledger.limit", "ledger.limit.tip", LedgerRow::high));
         table.getColumns().add(scaleColumn());
         table.setRowFactory(made -> new KindRow());
         table.getSelectionModel().selectedItemProperty().addListener((row, before, after) -> {
+            model.chosen().set(Optional.ofNullable(after));
             if (!following && after != null) {
                 model.light(after);
             }
         });
         model.litItem().addListener((item, before, after) -> follow());
         model.rows().addListener((ListChangeListener<LedgerRow>) change -> follow());
+        MenuItem origin = new MenuItem(Words.of("ledger.origin"));
+        origin.setId("ledger-origin-menu");
+        origin.setOnAction(pressed -> model.askOrigin());
+        table.setContextMenu(new ContextMenu(origin));
         table.setOnKeyPressed(key -> {
             if (COPY.match(key)) {
                 model.copy();
@@ -91,15 +105,29 @@ public final class LedgerView extends BorderPane {
         TableColumn<LedgerRow, LedgerRow> column = new TableColumn<>();
         column.setGraphic(header(words, order));
         column.getStyleClass().add("sl-numbers");
-        column.setMinWidth(102);
-        column.setPrefWidth(102);
-        return shown(column, new NumberCell.Factory(value));
+        column.setMinWidth(84);
+        column.setPrefWidth(92);
+        return shown(column, new NumberCell.Factory(value, model));
+    }
+
+    /** The net with non-detects as something else; of solutes alone. */
+    private TableColumn<LedgerRow, LedgerRow> bracket(String words, String tip, NumberCell.Value value) {
+        TableColumn<LedgerRow, LedgerRow> column = new TableColumn<>();
+        Label header = new Label(Words.of(words));
+        header.getStyleClass().add("sl-small");
+        header.setTooltip(new Tooltip(Words.of(tip)));
+        column.setGraphic(header);
+        column.getStyleClass().add("sl-numbers");
+        column.setMinWidth(BRACKET);
+        column.setPrefWidth(BRACKET);
+        column.visibleProperty().bind(model.solute().isNotEmpty());
+        return shown(column, new NumberCell.Factory(value, model));
     }
 
     private TableColumn<LedgerRow, LedgerRow> scaleColumn() {
         TableColumn<LedgerRow, LedgerRow> column = new TableColumn<>();
-        column.setMinWidth(60);
-        column.setPrefWidth(90);
+        column.setMinWidth(48);
+        column.setPrefWidth(56);
         return shown(column, new ScaleCell.Factory(model));
     }
 

@@ -36,7 +36,7 @@ final class ContourModel {
     ContourModel(ValuesModel values, Overlays overlays, Tasks tasks) {
         this.values = values;
         this.overlays = overlays;
-        this.drawing = tasks.latest("drawing contours");
+        this.drawing = tasks.latest("task.contours");
         values.view().addListener((view, before, after) -> refresh());
         values.scale().addListener((scale, before, after) -> refresh());
         overlays.contours().addListener((wanted, before, after) -> refresh());
@@ -56,6 +56,9 @@ final class ContourModel {
     }
 
     private static List<Contour> draw(Pyramid pyramid, Ticks levels, Progress progress) {
+        if (pyramid.isFlat()) {
+            return List.of();
+        }
         Grid grid = pyramid.lattice().grid();
         Drape drape = Drape.of(grid, grid.window(), MOST_CELLS, pyramid::cells);
         List<Contour> drawn = new ArrayList<>();

@@ -2,8 +2,10 @@ package org.seepledger.desktop.map;
 
 import java.nio.file.Path;
 import java.util.Optional;
+import javafx.beans.property.DoubleProperty;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
+import javafx.beans.property.SimpleDoubleProperty;
 import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
@@ -19,9 +21,12 @@ public final class GroundModel {
 
     private static final FileDialogs.Kind GEOTIFF = new FileDialogs.Kind("GeoTIFF", "*.tif");
 
+    private static final double USUAL_COVER = 0.6;
+
     private final Session session;
     private final FileDialogs dialogs;
     private final Lane reading;
+    private final DoubleProperty cover = new SimpleDoubleProperty(USUAL_COVER);
     private final ReadOnlyObjectWrapper<Optional<GroundPicture>> picture =
             new ReadOnlyObjectWrapper<>(Optional.empty());
 
@@ -35,7 +40,7 @@ public final class GroundModel {
     public GroundModel(Session session, Tasks tasks, FileDialogs dialogs) {
         this.session = session;
         this.dialogs = dialogs;
-        this.reading = tasks.latest("reading the picture under the map");
+        this.reading = tasks.latest("task.ground");
         session.set().addListener((set, before, after) -> clear());
     }
 
@@ -55,15 +60,20 @@ public final class GroundModel {
                 },
                 read -> {
                     picture.set(Optional.of(read));
-                    session.status().set(Words.of("ground.laid", file.getFileName()));
+                    session.notices().done(Words.of("ground.laid", file.getFileName()));
                 },
-                fault -> session.status().set(FaultWords.of(fault)));
+                fault -> session.notices().refuse(FaultWords.of(fault)));
     }
 
     /** Takes the picture away. */
     public void clear() {
         reading.cancel();
         picture.set(Optional.empty());
+    }
+
+    /** {@return how much of the picture the values over it cover, from 0 to 1} */
+    public DoubleProperty cover() {
+        return cover;
     }
 
     /** {@return the picture} */

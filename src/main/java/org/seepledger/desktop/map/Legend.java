@@ -4,17 +4,19 @@ import java.util.List;
 import java.util.Optional;
 import javafx.beans.value.ObservableValue;
 import javafx.geometry.Pos;
-import javafx.scene.canvas.Canvas;
 import javafx.scene.canvas.GraphicsContext;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.control.TextField;
+import javafx.scene.control.Tooltip;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 import org.seepledger.desktop.paint.MarkPainter;
+import org.seepledger.desktop.paint.SharpCanvas;
 import org.seepledger.desktop.theme.Theme;
+import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.job.MapQuantity;
 import org.seepledger.picture.Ink;
@@ -22,34 +24,43 @@ import org.seepledger.picture.Mark;
 import org.seepledger.picture.Ticks;
 import org.seepledger.picture.ValueScale;
 
-/** Which colour stands for which value; the ends of the range are typed, or fitted to what is shown. */
+/** Which colour stands for which value; a click opens fields to type the ends of the range, or to fit them to what is shown. */
 final class Legend extends VBox {
 
-    private static final double WIDTH = 236;
-    private static final double BAR = 12;
-    private static final double SIDE = 18;
+    private static final double WIDTH = 196;
+    private static final double BAR = 10;
+    private static final double SIDE = 14;
 
     private final ValuesModel model;
     private final ObservableValue<Theme> theme;
-    private final Label title = new Label();
-    private final Canvas bar = new Canvas(WIDTH, BAR + 20);
+    private final Button title = new Button();
+    private final SharpCanvas bar = new SharpCanvas(this::show);
     private final TextField from = field("range-from");
     private final TextField to = field("range-to");
+    private final HBox ends = new HBox(5);
 
     Legend(ValuesModel model, ObservableValue<Theme> theme) {
         this.model = model;
         this.theme = theme;
         setId("legend");
-        getStyleClass().add("sl-float");
-        title.getStyleClass().add("sl-strong");
+        getStyleClass().addAll("sl-float", "sl-legend");
+        bar.size(WIDTH, BAR + 16);
+        title.setId("legend-title");
+        title.getStyleClass().setAll("sl-legend-title");
+        title.setTooltip(new Tooltip(Words.of("action.legend")));
+        title.setOnAction(pressed -> turn());
+        title.setMaxWidth(WIDTH);
+        bar.setOnMouseClicked(click -> turn());
         Region gap = new Region();
         HBox.setHgrow(gap, Priority.ALWAYS);
         Button fit = new Button(Words.of("map.range.fit"));
         fit.setId("range-fit");
         fit.getStyleClass().addAll("small", "flat");
         fit.setOnAction(pressed -> model.fitRange());
-        HBox ends = new HBox(6, from, new Label(Words.of("map.range.to")), to, gap, fit);
+        ends.getChildren().addAll(from, new Label(Words.of("map.range.to")), to, gap, fit);
         ends.setAlignment(Pos.CENTER_LEFT);
+        ends.setVisible(false);
+        ends.managedProperty().bind(ends.visibleProperty());
         getChildren().addAll(title, bar, ends);
         setMaxSize(USE_PREF_SIZE, USE_PREF_SIZE);
         for (TextField field : List.of(from, to)) {
@@ -63,13 +74,19 @@ final class Legend extends VBox {
         model.scale().addListener((scale, before, after) -> show());
         model.view().addListener((view, before, after) -> show());
         theme.addListener((lit, before, after) -> show());
+        model.numbers().addListener((form, before, after) -> show());
         show();
+    }
+
+    /** Opens the fields for another range, or folds them away. */
+    void turn() {
+        ends.setVisible(!ends.isVisible());
     }
 
     private static TextField field(String id) {
         TextField field = new TextField();
         field.setId(id);
-        field.setPrefColumnCount(6);
+        field.setPrefColumnCount(5);
         field.getStyleClass().add("small");
         return field;
     }
@@ -80,7 +97,7 @@ final class Legend extends VBox {
         if (scale.isEmpty()) {
             return;
         }
-        String[] now = {text(scale.get().from()), text(scale.get().to())};
+        String[] now = {shown(scale.get().from()), shown(scale.get().to())};
         if (from.getText().equals(now[0]) && to.getText().equals(now[1])) {
             return;
         }
@@ -91,7 +108,7 @@ final class Legend extends VBox {
 
     private static double number(String text) {
         try {
-            return Double.parseDouble(text.strip().replace('−', '-').replace(',', '.'));
+            return Double.parseDouble(NumberForm.plain(text));
         } catch (NumberFormatException e) {
             return Double.NaN;
         }
@@ -106,20 +123,24 @@ final class Legend extends VBox {
         return text.length() > 9 ? String.format(java.util.Locale.ROOT, "%.3e", value) : text;
     }
 
+    private String shown(double value) {
+        return model.numbers().get().of(text(value));
+    }
+
     private void show() {
         Optional<ValueScale> scale = model.scale().get();
         setVisible(scale.isPresent() && model.view().get().isPresent());
         if (isVisible()) {
             MapQuantity quantity = model.view().get().orElseThrow().request().quantity();
             title.setText(Words.of("map.legend", quantity.label(), quantity.unit()));
-            from.setText(text(scale.get().from()));
-            to.setText(text(scale.get().to()));
+            from.setText(shown(scale.get().from()));
+            to.setText(shown(scale.get().to()));
             paint(scale.get());
         }
     }
 
     private void paint(ValueScale scale) {
-        GraphicsContext canvas = bar.getGraphicsContext2D();
+        GraphicsContext canvas = bar.context();
         canvas.clearRect(0, 0, bar.getWidth(), bar.getHeight());
         MarkPainter painter = new MarkPainter(canvas, theme.getValue());
         double length = WIDTH - 2 * SIDE;
@@ -135,7 +156,7 @@ final class Legend extends VBox {
             double[] tick = {x, BAR, x, BAR + 4};
             painter.paint(List.of(
                     new Mark.Line(tick, Mark.Stroke.of(Ink.Token.MUTED, 1)),
-                    Mark.Text.of(x, BAR + 16, ticks.label(i), 11, Mark.Anchor.MIDDLE)
+                    Mark.Text.of(x, BAR + 15, model.numbers().get().of(ticks.label(i)), 11, Mark.Anchor.MIDDLE)
                             .in(Ink.Token.MUTED)));
         }
     }

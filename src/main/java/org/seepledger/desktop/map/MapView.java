@@ -5,6 +5,7 @@ import javafx.beans.value.ObservableValue;
 import javafx.geometry.Insets;
 import javafx.geometry.Pos;
 import javafx.scene.Cursor;
+import javafx.scene.Node;
 import javafx.scene.input.MouseButton;
 import javafx.scene.input.MouseEvent;
 import javafx.scene.input.ScrollEvent;
@@ -26,6 +27,7 @@ public final class MapView extends BorderPane {
     private final GroundModel ground;
     private final MapCanvas canvas;
     private final Hand hand;
+    private final Legend legend;
     private boolean panning;
     private double lastX;
     private double lastY;
@@ -49,13 +51,19 @@ public final class MapView extends BorderPane {
         setId("map");
         canvas.setId("map-canvas");
         canvas.setFocusTraversable(true);
-        Legend legend = new Legend(model.values(), theme);
+        this.legend = new Legend(model.values(), theme);
         LayerColumn layers = new LayerColumn(model.session());
         Region ring = new Region();
         ring.getStyleClass().add("sl-ring");
         ring.setMouseTransparent(true);
         ring.visibleProperty().bind(canvas.focusedProperty());
+        StackPane.setMargin(ring, new Insets(-2));
+        // Kept as pictures, since their shadows would be worked out anew with each move of the map.
+        for (Node afloat : List.of(legend, layers, tray)) {
+            afloat.setCache(true);
+        }
         StackPane stack = new StackPane(canvas, ring, legend, layers, tray);
+        stack.getStyleClass().add("sl-map");
         canvas.invite(hand::marks);
         StackPane.setAlignment(legend, Pos.BOTTOM_RIGHT);
         StackPane.setAlignment(layers, Pos.TOP_LEFT);
@@ -178,6 +186,7 @@ public final class MapView extends BorderPane {
                 new Action(
                         group, "action.wells", "F4", () -> flip(model.overlays().wells())),
                 new Action(group, "action.fit", "F5", model.values()::fitRange),
+                new Action(group, "action.legend", "L", legend::turn),
                 new Action(group, "action.ground", "Shortcut+B", ground::choose),
                 new Action(group, "action.ground.clear", "Shortcut+Shift+B", ground::clear));
     }

@@ -11,6 +11,7 @@ import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.beans.property.SimpleObjectProperty;
 import javafx.collections.FXCollections;
 import javafx.collections.ObservableList;
+import org.seepledger.desktop.session.Draped;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.task.EntryGuard;
@@ -18,10 +19,12 @@ import org.seepledger.desktop.task.Lane;
 import org.seepledger.desktop.task.PaneState;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.words.FaultWords;
+import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.job.GridLayer;
 import org.seepledger.job.MapQuantity;
 import org.seepledger.picture.ValueScale;
+import org.seepledger.progress.Cancelled;
 import org.seepledger.progress.Progress;
 
 /** Which values of which layer lie over the map, and in which colours. */
@@ -43,11 +46,13 @@ public final class ValuesModel {
 
     ValuesModel(Session session, Tasks tasks) {
         this.session = session;
-        this.reading = tasks.latest("reading the map");
+        this.reading = tasks.latest("task.map");
         session.set().addListener((set, before, after) -> begin(after));
         session.layer().addListener((layer, before, after) -> refresh());
         session.interval().addListener((interval, before, after) -> refresh());
         quantity.addListener((chosen, before, after) -> refresh());
+        view.addListener((shown, before, after) -> tell());
+        scale.addListener((colours, before, after) -> tell());
         session.demand().addListener((demand, before, after) -> meet(after));
         begin(session.set().get());
     }
@@ -62,6 +67,13 @@ public final class ValuesModel {
         quantity.set(Optional.empty());
         quantities.setAll(set.map(opened -> opened.workbench().quantities()).orElse(List.of()));
         quantity.set(quantities.stream().findFirst());
+    }
+
+    private void tell() {
+        session.draped()
+                .set(view.get()
+                        .flatMap(shown -> scale.get()
+                                .map(colours -> new Draped(shown.request().quantity(), colours))));
     }
 
     private void meet(Session.Demand demand) {
@@ -93,7 +105,15 @@ public final class ValuesModel {
         reading.run(
                 progress -> read(set, shown, request, progress),
                 this::show,
-                fault -> state.set(PaneState.failed(FaultWords.of(fault))));
+                fault -> state.set(PaneState.failed(
+                        fault instanceof Cancelled ? Words.of("stopped.again") : FaultWords.of(fault))));
+    }
+
+    /** Reads again what was stopped or failed. */
+    public void again() {
+        if (state.get().phase() == PaneState.Phase.FAILED) {
+            refresh();
+        }
     }
 
     private static LayerView read(OpenSet set, Lattice lattice, LayerView.Request request, Progress progress) {
@@ -161,6 +181,11 @@ public final class ValuesModel {
     private void colour(LayerView shown, ValueScale taken) {
         scales.put(alike(shown.request()), taken);
         scale.set(Optional.of(taken));
+    }
+
+    /** {@return how numbers are written} */
+    ReadOnlyObjectProperty<NumberForm> numbers() {
+        return session.numbers();
     }
 
     /** {@return what can be shown} */

@@ -1,7 +1,9 @@
 package org.seepledger.desktop.session;
 
 import java.nio.file.Path;
+import java.util.List;
 import org.seepledger.aquifer.Aquifer;
+import org.seepledger.aquifer.Solute;
 import org.seepledger.job.Workbench;
 
 /**
@@ -15,6 +17,11 @@ public record OpenSet(Path path, Workbench workbench) implements AutoCloseable {
     /** {@return the aquifer} */
     public Aquifer aquifer() {
         return workbench.aquifer();
+    }
+
+    /** {@return the solutes that a concentration is given for} */
+    public List<Solute> solutes() {
+        return workbench.solutes().solutes();
     }
 
     @Override

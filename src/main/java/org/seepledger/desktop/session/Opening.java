@@ -15,7 +15,7 @@ import org.seepledger.job.Workbench;
  * @param kept the prisms that lie beside it
  * @param unsaved prisms that were drawn and not saved when the program last ended
  */
-public record Opening(OpenSet set, DrawingFile kept, Optional<DrawingFile> unsaved) {
+public record Opening(OpenSet set, DrawingFile kept, Optional<DrawingFile> unsaved) implements AutoCloseable {
 
     /** What the prisms beside an aquifer are called. */
     public static final String PRISMS = "prisms.geojson";
@@ -43,6 +43,11 @@ public record Opening(OpenSet set, DrawingFile kept, Optional<DrawingFile> unsav
             set.close();
             throw e;
         }
+    }
+
+    @Override
+    public void close() {
+        set.close();
     }
 
     private static boolean isSetFile(Path path) {

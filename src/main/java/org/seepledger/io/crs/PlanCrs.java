@@ -107,6 +107,13 @@ public final class PlanCrs {
     }
 
     /**
+     * {@return what files call the system: its EPSG code, else well-known text; empty when local}
+     */
+    public Optional<String> name() {
+        return isLocal() ? Optional.empty() : code.or(() -> Optional.of(wkt()));
+    }
+
+    /**
      * {@return the system as well-known text, version 1; empty when local}
      */
     public String wkt() {

@@ -9,6 +9,7 @@ import java.util.Set;
 import java.util.function.Consumer;
 import org.locationtech.jts.geom.Coordinate;
 import org.seepledger.aquifer.Grid;
+import org.seepledger.fault.DataFault;
 import org.seepledger.io.JsonFile;
 import org.seepledger.io.crs.PlanCrs;
 import org.seepledger.io.crs.PlanTransform;
@@ -27,17 +28,35 @@ public record TransectsReader(PlanCrs crs, Grid grid, Consumer<String> notes) {
     /**
      * {@return the transects of a file, in its order}
      *
-     * @param file a FeatureCollection of LineStrings, each with a {@code name}
+     * @param file a FeatureCollection of LineStrings, at least one, each with a {@code name}
      * @param shownFile the file as the user named it, for messages
-     * @throws org.seepledger.fault.DataFault if anything in it is wrong
+     * @throws DataFault if anything in it is wrong
      */
     public List<Transect> read(Path file, String shownFile) {
+        List<Transect> transects = asDrawn(file, shownFile);
+        if (transects.isEmpty()) {
+            throw noFeatures(new Spot(shownFile, ""));
+        }
+        return transects;
+    }
+
+    private static DataFault noFeatures(Spot whole) {
+        return whole.fault("no features", "a FeatureCollection of LineStrings", "Draw a line and save it as GeoJSON.");
+    }
+
+    /**
+     * {@return the transects of a file, in its order; none where all were deleted}
+     *
+     * @param file a FeatureCollection of LineStrings, each with a {@code name}
+     * @param shownFile the file as the user named it, for messages
+     * @throws DataFault if anything in it is wrong
+     */
+    public List<Transect> asDrawn(Path file, String shownFile) {
         JsonNode root = JsonFile.read(file, shownFile);
         Spot whole = new Spot(shownFile, "");
         JsonNode features = root.path("features");
-        if (!features.isArray() || features.isEmpty()) {
-            throw whole.fault(
-                    "no features", "a FeatureCollection of LineStrings", "Draw a line and save it as GeoJSON.");
+        if (!features.isArray()) {
+            throw noFeatures(whole);
         }
         FileCrs fileCrs = new FileCrs(crs, notes);
         PlanTransform transform = fileCrs.transform(root, whole);

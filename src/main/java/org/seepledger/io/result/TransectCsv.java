@@ -2,7 +2,6 @@ package org.seepledger.io.result;
 
 import java.io.IOException;
 import java.nio.file.Path;
-import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import org.seepledger.aquifer.Times;
@@ -122,19 +121,13 @@ public final class TransectCsv {
             begin(measured);
             cells(CsvText.text(measured.names().get(panel)), "");
             end(
-                    choice -> one(measured.panels().get(choice.ordinal()), only),
+                    choice -> measured.panels().get(choice.ordinal()).only(only),
                     Optional.empty(),
                     measured.concentration());
         }
         begin(measured);
         cells(ALL, "");
         end(choice -> measured.panels().get(choice.ordinal()), Optional.empty(), measured.concentration());
-    }
-
-    private static Panels one(Panels all, int panel) {
-        return new Panels(
-                new double[] {all.areas()[panel]}, new double[] {all.flows()[panel]}, new double[] {all.rates()[panel]
-                });
     }
 
     private void begin(MeasuredPanels measured) throws IOException {
@@ -147,10 +140,9 @@ public final class TransectCsv {
 
     private void end(ByChoice panels, Optional<Period> period, Measure unit) throws IOException {
         Panels shown = panels.of(NonDetects.HALF);
-        double flow = Arrays.stream(shown.flows()).sum();
         double mass =
                 period.map(covered -> shown.discharge() * covered.duration()).orElse(Double.NaN);
-        cells(CsvText.number(shown.area()), CsvText.number(flow), rate(shown));
+        cells(CsvText.number(shown.area()), CsvText.number(shown.flow()), rate(shown));
         cells(CsvText.number(mass * units.massFactor()));
         cells(rate(panels.of(NonDetects.ZERO)), rate(panels.of(NonDetects.LIMIT)));
         cells(CsvText.number(shown.fluxAveraged() * MassUnits.concentrationFactor(unit, length)));

@@ -130,7 +130,8 @@ class LiveBudgetTest {
                 .budget(moved(500).get(0), reading.period(set, 0))
                 .orElseThrow();
         assertThat(shown.prism()).isEqualTo(moved(500).get(0));
-        assertThat(shown.whose(set)).contains("well field", "m²", "interval 1", "2021-10-01");
+        assertThat(shown.whose(set, org.seepledger.desktop.words.NumberForm.SPACE_POINT))
+                .contains("well field", "m²", "interval 1", "2021-10-01");
     }
 
     @Test
@@ -186,5 +187,21 @@ class LiveBudgetTest {
         session.show(Optional.empty());
         assertThat(live.known().get()).isEqualTo(Known.NOTHING);
         assertThat(live.now().get().phase()).isEqualTo(Phase.EMPTY);
+    }
+
+    @Test
+    void whatWasStoppedSaysSoAndIsTakenUpAgain() {
+        show();
+        tasks.stop();
+        tasks.stop();
+        assertThat(live.now().get().phase()).isEqualTo(Phase.FAILED);
+        assertThat(live.record().get().phase()).isEqualTo(Phase.FAILED);
+        assertThat(live.record().get().words()).contains("Stopped");
+        tasks.all();
+        assertThat(live.record().get().phase()).isEqualTo(Phase.FAILED);
+        live.again();
+        tasks.all();
+        assertThat(live.now().get().phase()).isEqualTo(Phase.READY);
+        assertThat(live.record().get().phase()).isEqualTo(Phase.READY);
     }
 }

@@ -8,6 +8,9 @@ import org.seepledger.desktop.session.Drawing;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Opening;
 import org.seepledger.desktop.session.Session;
+import org.seepledger.desktop.solute.LivePlume;
+import org.seepledger.desktop.solute.MassReading;
+import org.seepledger.desktop.solute.SoluteLook;
 import org.seepledger.desktop.task.DirectTasks;
 import org.seepledger.prism.Prism;
 import org.seepledger.prism.Ring;
@@ -24,6 +27,15 @@ public final class LiveSet implements AutoCloseable {
 
     /** The budgets. */
     public final LiveBudget live = new LiveBudget(session, new DirectTasks());
+
+    /** How solutes are looked at. */
+    public final SoluteLook look = new SoluteLook(session);
+
+    /** The solutes' budgets. */
+    public final LivePlume plumes = new LivePlume(session, look, new DirectTasks());
+
+    /** How masses are read. */
+    public final MassReading masses = new MassReading(session, reading);
 
     /** Where copies go. */
     public final GivenAnswers answers = new GivenAnswers();
@@ -43,6 +55,11 @@ public final class LiveSet implements AutoCloseable {
         session.selected().set(prisms.get(0).name());
     }
 
+    /** A set in a folder. */
+    public static LiveSet of(Path folder) {
+        return new LiveSet(folder);
+    }
+
     /** The valley: 24 dated intervals, four prisms, storage known; it closes. */
     public static LiveSet valley() {
         return new LiveSet(Path.of("sample-aquifers/valley"));
@@ -51,6 +68,11 @@ public final class LiveSet implements AutoCloseable {
     /** The terrace: specific discharge at cell centres; it does not close. */
     public static LiveSet terrace() {
         return new LiveSet(Path.of("sample-aquifers/terrace"));
+    }
+
+    /** The depot: 12 dated intervals, two prisms, a solvent and its breakdown product, non-detects. */
+    public static LiveSet depot() {
+        return new LiveSet(Path.of("sample-aquifers/depot"));
     }
 
     /** A prism with all its vertices moved to the east. */

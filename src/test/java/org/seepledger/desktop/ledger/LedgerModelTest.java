@@ -17,7 +17,8 @@ import org.seepledger.prism.Prism;
 class LedgerModelTest {
 
     private final LiveSet valley = LiveSet.valley();
-    private final LedgerModel model = new LedgerModel(valley.session, valley.live, valley.reading, valley.answers);
+    private final LedgerModel model =
+            new LedgerModel(valley.session, valley.live, valley.reading, valley.plumes, valley.masses, valley.answers);
 
     @AfterEach
     void close() {
@@ -139,7 +140,8 @@ class LedgerModelTest {
                 .anyMatch(line -> line.startsWith("closure error\t\t\t") && line.endsWith("\t%"));
         assertThat(tabs).startsWith("well field").contains(Disclaimer.text());
         assertThat(html).contains("<caption>well field", "<td>" + exact + "</td><td>m3/d</td>", Disclaimer.text());
-        assertThat(valley.session.status().get()).startsWith("Copied the budget of well field");
+        assertThat(valley.session.notices().latest().get().orElseThrow().words())
+                .startsWith("Copied the budget of well field");
     }
 
     @Test
@@ -154,12 +156,12 @@ class LedgerModelTest {
 
     @Test
     void numbersOfOneColumnHaveFourDigitsAndOneSign() {
-        LedgerRow row = new LedgerRow(Kind.ENTRY, Group.SIDE, "a", 0, "a", 780, 0.5, -1234.4);
+        LedgerRow row = new LedgerRow(Kind.ENTRY, Group.SIDE, "a", 0, "a", 780, 0.5, -1234.4, Double.NaN, Double.NaN);
         assertThat(row.text(row.inflow())).isEqualTo("780.0");
         assertThat(row.text(row.outflow())).isEqualTo("0.5000");
         assertThat(row.text(row.net())).isEqualTo("−1\u202f234");
         assertThat(row.text(Double.NaN)).isEqualTo("–");
-        LedgerRow total = new LedgerRow(Kind.TOTAL, Group.TOTAL, "a", -1, "a", Double.NaN, Double.NaN, 3);
+        LedgerRow total = LedgerRow.one(Kind.TOTAL, Group.TOTAL, "a", -1, "a", 3);
         assertThat(total.text(total.inflow())).isEmpty();
         assertThat(total.text(total.net())).isEqualTo("3.000");
     }

@@ -1,0 +1,219 @@
+package org.seepledger.job;
+
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.OptionalInt;
+import java.util.function.Function;
+import org.seepledger.aquifer.Aquifer;
+import org.seepledger.aquifer.Grid;
+import org.seepledger.aquifer.KnownCells;
+import org.seepledger.aquifer.Solute;
+import org.seepledger.aquifer.Window;
+import org.seepledger.balance.Span;
+import org.seepledger.balance.WellRule;
+import org.seepledger.io.aquifer.AquiferFolder;
+import org.seepledger.io.prisms.PrismsReader;
+import org.seepledger.io.prisms.TransectsReader;
+import org.seepledger.io.prisms.TransectsWriter;
+import org.seepledger.io.result.MassUnits;
+import org.seepledger.io.table.MeasuredPanels;
+import org.seepledger.plume.Crossing;
+import org.seepledger.plume.Plume;
+import org.seepledger.plume.SoluteBalance;
+import org.seepledger.plume.TransectFlows;
+import org.seepledger.prism.Prism;
+import org.seepledger.prism.PrismCut;
+import org.seepledger.prism.Ring;
+import org.seepledger.prism.Side;
+import org.seepledger.prism.Transect;
+import org.seepledger.prism.VerticalRange;
+import org.seepledger.progress.Progress;
+import org.seepledger.unit.Measure;
+
+/**
+ * The part of a {@link Workbench} that answers questions about solutes. Budgets and crossings are those that {@link
+ * PlumeJob} makes of the same prisms and transects, digit for digit.
+ */
+public final class SoluteBench {
+
+    private final AquiferFolder folder;
+    private final List<Solute> solutes;
+    private final Function<Window, KnownCells> kept;
+    private final Gate gate;
+    private final Function<List<String>, PrismsReader> readers;
+
+    /**
+     * How solutes are balanced.
+     *
+     * @param dispersion whether dispersion is booked where it is known
+     * @param above the concentration above which volume and area are counted, kg/length³; empty for none
+     */
+    public record Choice(boolean dispersion, OptionalDouble above) {}
+
+    SoluteBench(
+            AquiferFolder folder,
+            Function<Window, KnownCells> kept,
+            Gate gate,
+            Function<List<String>, PrismsReader> readers) {
+        this.folder = folder;
+        this.solutes = known(folder.solutes());
+        this.kept = kept;
+        this.gate = gate;
+        this.readers = readers;
+    }
+
+    /** Those solutes that can be balanced. */
+    static List<Solute> known(List<Solute> all) {
+        return all.stream().filter(solute -> solute.concentration().isPresent()).toList();
+    }
+
+    private Aquifer aquifer() {
+        return folder.aquifer();
+    }
+
+    /** {@return the solutes that a concentration is given for} */
+    public List<Solute> solutes() {
+        return solutes;
+    }
+
+    /**
+     * {@return the units of results}
+     *
+     * @param rate the unit of mass rates; empty for the mass's over the set's time unit
+     * @param mass the unit of masses; empty for kilograms
+     */
+    public MassUnits units(Optional<Measure> rate, Optional<Measure> mass) {
+        return MassUnits.of(aquifer().lengthUnit(), aquifer().timeUnit(), rate.orElse(null), mass.orElse(null), null);
+    }
+
+    /**
+     * Balances all solutes in one prism and one interval. Quick for a prism that was asked about before and has moved a
+     * little.
+     *
+     * @param prism the prism; what lies beyond the grid is cut off
+     * @param interval the interval, from 0
+     * @param choice how
+     * @param progress told how far the work is
+     * @return the budgets
+     * @throws org.seepledger.fault.DataFault if the prism is no polygon or lies off the grid, or the data are wrong
+     * @throws org.seepledger.progress.Cancelled if the work was stopped
+     */
+    public IntervalPlume interval(Prism prism, int interval, Choice choice, Progress progress) {
+        return gate.ask(progress, until -> {
+            List<String> notes = new ArrayList<>();
+            Prism admitted = readers.apply(notes).admitted(prism);
+            List<Plume> plumes = SoluteBalance.of(
+                    aquifer(), kept, Span.only(interval), solutes, List.of(admitted), options(choice, 1), until);
+            return new IntervalPlume(prism, area(admitted), interval, plumes, notes);
+        });
+    }
+
+    private static SoluteBalance.Options options(Choice choice, int threads) {
+        return new SoluteBalance.Options(WellRule.POINT, choice.dispersion(), choice.above(), threads);
+    }
+
+    private double area(Prism prism) {
+        return PrismCut.of(prism, aquifer().grid()).area();
+    }
+
+    /**
+     * Balances all solutes in prisms over the whole record.
+     *
+     * @param prisms at least one prism; what lies beyond the grid is cut off
+     * @param choice how
+     * @param progress told how far the work is
+     * @return the budgets
+     * @throws org.seepledger.fault.DataFault if a prism is no polygon or lies off the grid, or the data are wrong
+     * @throws org.seepledger.progress.Cancelled if the work was stopped
+     */
+    public RecordPlume record(List<Prism> prisms, Choice choice, Progress progress) {
+        return gate.ask(progress, until -> {
+            List<String> notes = new ArrayList<>();
+            PrismsReader reader = readers.apply(notes);
+            List<Prism> admitted = prisms.stream().map(reader::admitted).toList();
+            List<Plume> plumes =
+                    SoluteBalance.of(aquifer(), solutes, admitted, options(choice, Workbench.threads()), until);
+            PlumeWarnings words = new PlumeWarnings(aquifer(), choice.dispersion());
+            notes.addAll(words.remarks(solutes, plumes));
+            return new RecordPlume(
+                    prisms, admitted.stream().map(this::area).toList(), plumes, words.warnings(plumes), notes);
+        });
+    }
+
+    /**
+     * Works out what crosses transects.
+     *
+     * @param transects at least one line within the grid
+     * @param interval the only interval asked for, from 0; empty for all
+     * @param progress told how far the work is
+     * @return by transect, and for each by solute
+     * @throws org.seepledger.fault.DataFault if the data are wrong
+     * @throws org.seepledger.progress.Cancelled if the work was stopped
+     */
+    public List<Crossing> crossings(List<Transect> transects, OptionalInt interval, Progress progress) {
+        Span span = interval.isPresent()
+                ? Span.only(interval.getAsInt())
+                : Span.all(aquifer().times());
+        Function<Window, KnownCells> known = interval.isPresent() ? kept : window -> aquifer();
+        return gate.ask(progress, until -> TransectFlows.of(aquifer(), known, span, solutes, transects, until));
+    }
+
+    /**
+     * {@return the prism that holds the whole grid}
+     *
+     * @param name what to call it
+     */
+    public Prism everything(String name) {
+        Grid grid = aquifer().grid();
+        double right = grid.x().edge(grid.columns());
+        double top = grid.y().edge(grid.rows());
+        double[][] corners = {{0, 0}, {right, 0}, {right, top}, {0, top}};
+        List<Side> sides = new ArrayList<>();
+        for (double[] corner : corners) {
+            String side = "side " + (sides.size() + 1);
+            sides.add(new Side(side, side, grid.mapX(corner[0], corner[1]), grid.mapY(corner[0], corner[1])));
+        }
+        int layers = aquifer().layers().size();
+        return new Prism(name, List.of(new Ring(1, 0, sides)), new VerticalRange.Layers(0, layers - 1));
+    }
+
+    /**
+     * {@return the transects of a file; none where it has none}
+     *
+     * @param file a GeoJSON file of LineStrings
+     * @throws org.seepledger.fault.DataFault if anything in it is wrong
+     */
+    public List<Transect> transects(Path file) {
+        return gate.ask(
+                Progress.NONE,
+                until ->
+                        new TransectsReader(folder.crs(), aquifer().grid(), note -> {}).asDrawn(file, file.toString()));
+    }
+
+    /**
+     * Writes transects as the command reads them; the file appears whole or not at all.
+     *
+     * @param file the file, which is replaced if it exists
+     * @param transects the transects
+     * @throws org.seepledger.fault.UsageFault if it cannot be written
+     */
+    public void write(Path file, List<Transect> transects) {
+        TransectsWriter.write(file, folder.crs().name(), transects);
+    }
+
+    /**
+     * {@return the measured panels of a file, by transect and solute}
+     *
+     * @param file a CSV
+     * @throws org.seepledger.fault.DataFault if anything in it is wrong
+     */
+    public List<MeasuredPanels> panels(Path file) {
+        return gate.ask(
+                Progress.NONE,
+                until -> MeasuredPanels.read(
+                        file, file.toString(), aquifer().lengthUnit(), aquifer().timeUnit(), warning -> {}));
+    }
+}
