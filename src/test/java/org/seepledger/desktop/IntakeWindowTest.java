@@ -84,7 +84,7 @@ class IntakeWindowTest {
     @Test
     void theValleysLooseFilesBecomeTheShippedFolder() throws IOException {
         bringLooseValley();
-        window.robot.clickOn((Node) window.robot.lookup(".sl-finding").query());
+        window.robot.clickOn(".sl-finding");
         window.await(() -> find("#intake-vertical-share", TextField.class).isFocused());
         window.robot.write("0.1, 0.05, 0.1");
         window.robot.press(KeyCode.ENTER).release(KeyCode.ENTER);
