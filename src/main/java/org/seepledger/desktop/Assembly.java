@@ -19,6 +19,7 @@ import org.seepledger.desktop.draw.Tray;
 import org.seepledger.desktop.folio.Folio;
 import org.seepledger.desktop.handover.HandoverModel;
 import org.seepledger.desktop.handover.HandoverPage;
+import org.seepledger.desktop.intake.IntakeActions;
 import org.seepledger.desktop.intake.IntakeModel;
 import org.seepledger.desktop.intake.IntakeView;
 import org.seepledger.desktop.intake.MendModel;
@@ -110,6 +111,7 @@ final class Assembly {
         actions.add(mapView.actions());
         actions.add(new DraftActions(draft, hand, files, tray, mapView::repaint).all(map));
         actions.add(folio.actions());
+        actions.add(IntakeActions.of(intake, mend));
         HandoverModel handover = new HandoverModel(
                 session, outside.tasks(), outside.dialogs(), outside.copies(), outside.opener(), new PicturePng());
         HandoverPage handoverPage = new HandoverPage(handover, view::lift);

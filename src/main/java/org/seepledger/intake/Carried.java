@@ -23,7 +23,8 @@ final class Carried {
 
     /** {@return whether concentrations are of a source, not of the aquifer's water} */
     static boolean is(Part concentration) {
-        boolean beside = concentration.item().uses().stream().anyMatch(use -> use.role().isSource());
+        boolean beside =
+                concentration.item().uses().stream().anyMatch(use -> use.role().isSource());
         boolean forIntervals = concentration.item() instanceof Item.Table table
                 && table.places().contains(Place.INTERVAL);
         return beside || forIntervals;
@@ -55,7 +56,8 @@ final class Carried {
         if (beside.isEmpty() && sources.size() > 1) {
             findings.accept(Finding.fault(
                     concentration.item(),
-                    concentration.shown() + " gives concentrations for intervals, as sources carry them, and there are several"
+                    concentration.shown()
+                            + " gives concentrations for intervals, as sources carry them, and there are several"
                             + " sources. Put them into the table of their source, or leave them out."));
         }
         return beside.or(() -> sources.size() == 1 ? Optional.of(sources.get(0)) : Optional.empty());

@@ -166,7 +166,8 @@ final class OutcomePane extends VBox {
         size.setText(Words.of(
                 "intake.size", made.copied().copies().size(), bytes(made.plan().bytes())));
         List<String> reasons = made.placed().obstacles();
-        obstacles.setText(reasons.isEmpty() ? Words.of("intake.place", made.plan().root()) : why(reasons));
+        obstacles.setText(
+                reasons.isEmpty() ? Words.of("intake.place", made.plan().root()) : why(reasons));
     }
 
     private static String why(List<String> reasons) {
