@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.function.Consumer;
 import org.seepledger.aquifer.Aquifer;
+import org.seepledger.aquifer.GriddedValues;
 import org.seepledger.aquifer.KeptCells;
 import org.seepledger.aquifer.Window;
 import org.seepledger.balance.Balance;
@@ -14,6 +15,7 @@ import org.seepledger.balance.Span;
 import org.seepledger.balance.Trace;
 import org.seepledger.balance.WaterBalance;
 import org.seepledger.balance.WellRule;
+import org.seepledger.balance.Whereabouts;
 import org.seepledger.fault.UsageFault;
 import org.seepledger.io.DataFolder;
 import org.seepledger.io.aquifer.AquiferFolder;
@@ -27,10 +29,17 @@ import org.seepledger.io.result.Provenance;
 import org.seepledger.io.result.ResultUnits;
 import org.seepledger.ledger.Period;
 import org.seepledger.ledger.PeriodBudget;
+import org.seepledger.picture.Body;
+import org.seepledger.picture.NearbyWell;
+import org.seepledger.picture.Picture;
+import org.seepledger.picture.Profile;
+import org.seepledger.picture.Section;
+import org.seepledger.picture.SectionLine;
 import org.seepledger.prism.Prism;
 import org.seepledger.progress.Cancelled;
 import org.seepledger.progress.Progress;
 import org.seepledger.sketch.Drawing;
+import org.seepledger.sketch.Limit;
 import org.seepledger.unit.Measure;
 
 /**
@@ -166,6 +175,23 @@ public final class Workbench implements AutoCloseable {
     }
 
     /**
+     * {@return the elevations of a surface raster, which prisms may then name as their top or bottom; it stays open as long as
+     * the workbench}
+     *
+     * @param file the file that the prisms are kept in, from whose folder the surface is named
+     * @param surface the surface
+     * @throws org.seepledger.fault.DataFault if it is not there, leads out of the folder, or does not match the grid
+     */
+    public GriddedValues surface(Path file, Limit.Surface surface) {
+        return gate.ask(Progress.NONE, progress -> {
+            DataFolder folder = DataFolder.holding(file, file.toString());
+            synchronized (surfaces) {
+                return surfaces.read(folder.resolve(surface.path(), "a top or bottom"), surface.path());
+            }
+        });
+    }
+
+    /**
      * {@return a picture that lies under the map}
      *
      * @param file a GeoTIFF in the aquifer's coordinate system
@@ -207,8 +233,7 @@ public final class Workbench implements AutoCloseable {
     }
 
     private PrismsReader reader(Consumer<String> notes) {
-        int layers = aquifer().layers().size();
-        return new PrismsReader(folder.crs(), aquifer().grid(), layers, true, surfaces, notes, notes);
+        return new PrismsReader(folder.crs(), aquifer().grid(), aquifer().layers(), true, surfaces, notes, notes);
     }
 
     /**
@@ -242,6 +267,28 @@ public final class Workbench implements AutoCloseable {
         double area = balance.cuts().get(0).area();
         return new IntervalBudget(
                 prism, area, interval, budget, balance.whereabouts().get(0), notes);
+    }
+
+    /**
+     * Looks where a prism does not close in a period.
+     *
+     * @param prism the prism; what lies beyond the grid is cut off
+     * @param period the period
+     * @param progress told how far the work is
+     * @return the cells furthest from balance, mean over all intervals that the period takes part of
+     * @throws org.seepledger.fault.DataFault if the prism is no polygon or lies off the grid, or the data are wrong
+     * @throws Cancelled if the work was stopped
+     */
+    public Whereabouts whereabouts(Prism prism, Period period, Progress progress) {
+        return gate.ask(progress, until -> {
+            List<Period.Part> parts = period.parts();
+            Span span = new Span(
+                    parts.get(0).interval(), parts.get(parts.size() - 1).interval() + 1);
+            List<Prism> admitted = List.of(reader(note -> {}).admitted(prism));
+            return WaterBalance.of(aquifer(), kept::around, span, admitted, WellRule.POINT, 1, until)
+                    .whereabouts()
+                    .get(0);
+        });
     }
 
     /**
@@ -340,6 +387,18 @@ public final class Workbench implements AutoCloseable {
     }
 
     /**
+     * {@return a map on paper of what a view shows}
+     *
+     * @param asked what it is to show
+     * @param progress told how far the work is
+     * @throws org.seepledger.fault.DataFault if the data are wrong, or the selected prism has no budget
+     * @throws Cancelled if the work was stopped
+     */
+    public Picture map(MapAsked asked, Progress progress) {
+        return new MapOnPaper(this, asked, progress).drawn();
+    }
+
+    /**
      * Reads horizontal flux for arrows on a map.
      *
      * @param layer the layer, from 0
@@ -362,6 +421,55 @@ public final class Workbench implements AutoCloseable {
      */
     public List<WellPlace> wells(int interval) {
         return WellPlace.of(aquifer(), interval);
+    }
+
+    /**
+     * Cuts the aquifer along a line.
+     *
+     * @param line the line
+     * @param quantity one of {@link #quantities()}, to be shown as colour; empty for none
+     * @param interval the interval, from 0, whose begin and end water levels are those of
+     * @param progress told how far the reading is
+     * @return what stands along it; nothing where it lies off the grid
+     * @throws org.seepledger.fault.DataFault if the data are wrong
+     * @throws Cancelled if the work was stopped
+     */
+    public Profile profile(SectionLine line, Optional<MapQuantity> quantity, int interval, Progress progress) {
+        Optional<Profile.LayerValues> values =
+                quantity.map(shown -> (layer, window) -> new CellReading(aquifer(), interval, layer, window).of(shown));
+        return gate.ask(progress, until -> Profile.along(line, aquifer(), interval, interval + 1, values, until));
+    }
+
+    /**
+     * Puts prisms and wells into a section; quick, so that it follows prisms while they are drawn.
+     *
+     * @param profile what stands along its line
+     * @param prisms the prisms as they are drawn, even beyond the grid
+     * @param within how far from the line wells are shown, in length units
+     * @param progress told how far the work is
+     * @return the section, without colours, and with nothing standing out
+     * @throws org.seepledger.fault.DataFault if a prism's surface cannot be read
+     * @throws Cancelled if the work was stopped
+     */
+    public Section section(Profile profile, List<Prism> prisms, double within, Progress progress) {
+        return gate.ask(progress, until -> {
+            List<Body> bodies = new ArrayList<>();
+            for (Prism prism : prisms) {
+                until.step();
+                bodies.add(Body.of(prism, profile));
+            }
+            boolean moves = aquifer().head().filter(GriddedValues::changes).isPresent();
+            return new Section(
+                    profile,
+                    aquifer().layers(),
+                    aquifer().lengthUnit().toString(),
+                    moves ? Optional.of("interval") : Optional.empty(),
+                    bodies,
+                    NearbyWell.of(aquifer(), profile, within),
+                    within,
+                    Optional.empty(),
+                    Section.Light.NONE);
+        });
     }
 
     static int threads() {

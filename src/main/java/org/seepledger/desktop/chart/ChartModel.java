@@ -21,6 +21,7 @@ import org.seepledger.job.RecordBudget;
 import org.seepledger.ledger.Ledger;
 import org.seepledger.ledger.Period;
 import org.seepledger.picture.BudgetSeries;
+import org.seepledger.picture.Picture;
 
 /** The selected prism's budgets through time, and the interval looked at among them. */
 public final class ChartModel {
@@ -128,6 +129,15 @@ public final class ChartModel {
                 }));
     }
 
+    /**
+     * {@return a chart as a picture, its numbers in the form chosen}
+     *
+     * @param chart the chart
+     */
+    public Picture picture(BudgetSeries chart) {
+        return chart.picture().written(session.numbers().get()::label);
+    }
+
     private Optional<Ledger> ledger() {
         return live.whole()
                 .get()
@@ -162,7 +172,8 @@ public final class ChartModel {
                         open.workbench()
                                 .periods(Periods.Every.INTERVAL, 1)
                                 .get(session.interval().get()),
-                        open.aquifer().times()))
+                        open.aquifer().times(),
+                        session.numbers().get()))
                 .orElse(""));
         changes.set(changes.get() + 1);
     }

@@ -3,6 +3,7 @@ package org.seepledger.desktop.chart;
 import java.util.Optional;
 import javafx.beans.value.ObservableValue;
 import javafx.scene.Cursor;
+import javafx.scene.Node;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.Slider;
@@ -17,7 +18,7 @@ import org.seepledger.desktop.words.Words;
 import org.seepledger.picture.BudgetSeries;
 import org.seepledger.picture.Picture;
 
-/** The chart, and above it the slider of the interval looked at; a click or drag on the chart moves it too. */
+/** The chart, and for above it the slider of the interval looked at; a click or drag on the chart moves it too. */
 public final class ChartView extends BorderPane {
 
     private static final double LEAST_HEIGHT = 196;
@@ -47,12 +48,12 @@ public final class ChartView extends BorderPane {
         scroll.setFitToHeight(true);
         scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
         setMinHeight(LEAST_HEIGHT);
-        setTop(time());
         setCenter(new StatePane(scroll, model.state()).withAction(Words.of("budget.draw"), model::draw));
         model.changes().addListener((changes, before, after) -> picture.redraw());
     }
 
-    private HBox time() {
+    /** {@return the slider of the interval looked at, to be put above the chart} */
+    public Node bar() {
         Label when = new Label();
         when.setId("interval-words");
         when.getStyleClass().add("sl-belongs");
@@ -77,7 +78,7 @@ public final class ChartView extends BorderPane {
 
     private Optional<Picture> draw(double width, double height) {
         drawn = model.chart(width, height);
-        return drawn.map(BudgetSeries::picture);
+        return drawn.map(model::picture);
     }
 
     private void look(MouseEvent mouse) {

@@ -2,6 +2,7 @@ package org.seepledger.desktop.closure;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyStringProperty;
 import javafx.beans.property.ReadOnlyStringWrapper;
@@ -14,6 +15,7 @@ import org.seepledger.desktop.budget.Reading;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.task.PaneState;
+import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.io.result.PrismBudget;
 import org.seepledger.io.result.ResultUnits;
@@ -40,6 +42,7 @@ public final class ClosureModel {
     private final ObservableList<String> notes = FXCollections.observableArrayList();
     private final ObservableList<String> leads = FXCollections.observableArrayList();
     private final ObservableList<Spot> spots = FXCollections.observableArrayList();
+    private final PeriodSpots ofPeriod;
     private final ReadOnlyStringWrapper belongs = new ReadOnlyStringWrapper("");
 
     /**
@@ -48,14 +51,17 @@ public final class ClosureModel {
      * @param session what the window looks at
      * @param live the budgets
      * @param reading how figures are read
+     * @param tasks looks for the cells of the period shown
      */
-    public ClosureModel(Session session, LiveBudget live, Reading reading) {
+    public ClosureModel(Session session, LiveBudget live, Reading reading, Tasks tasks) {
         this.session = session;
         this.live = live;
         this.reading = reading;
+        this.ofPeriod = new PeriodSpots(session, live, reading, tasks);
         live.whole().addListener((whole, before, after) -> show());
         session.selected().addListener((selected, before, after) -> show());
         reading.changes().addListener((changes, before, after) -> show());
+        session.interval().addListener((interval, before, after) -> findOfPeriod());
         show();
     }
 
@@ -82,6 +88,16 @@ public final class ClosureModel {
     /** {@return the cells furthest from balance, the furthest first; empty where the budget closes to rounding} */
     public ObservableList<Spot> spots() {
         return spots;
+    }
+
+    /** {@return the same of the period that is shown, where that is shorter than the record} */
+    public ObservableList<Spot> spotsOfPeriod() {
+        return ofPeriod.spots();
+    }
+
+    /** {@return what that period is called; empty where there are no such cells} */
+    public ReadOnlyStringProperty period() {
+        return ofPeriod.period();
     }
 
     /** {@return which geometry and time the sentences belong to} */
@@ -116,12 +132,13 @@ public final class ClosureModel {
                                         shown.budget(),
                                         BudgetBlocks.Flows.NET,
                                         reading.shown(set),
-                                        Math.max(300, width)))));
+                                        Math.max(300, width)))
+                                .map(blocks -> blocks.written(session.numbers().get()::label))));
     }
 
     /** Asks the map to show imbalance. */
     public void showImbalance() {
-        spots.stream()
+        Stream.concat(spots.stream(), spotsOfPeriod().stream())
                 .findFirst()
                 .ifPresent(spot -> session.layer().set(spot.cell().layer()));
         session.demand().set(Session.Demand.SHOW_IMBALANCE);
@@ -154,6 +171,14 @@ public final class ClosureModel {
                 show(set.get(), record.get(), prism);
             }
         }
+        findOfPeriod();
+    }
+
+    private void findOfPeriod() {
+        session.set().get().ifPresent(set -> {
+            ResultUnits units = reading.inUse(set);
+            ofPeriod.find(cell -> spot(set, cell, units));
+        });
     }
 
     private void show(OpenSet set, RecordBudget record, int prism) {
@@ -165,7 +190,7 @@ public final class ClosureModel {
         PrismResult result = PrismResult.of(set.aquifer(), record.balance(), budgets, prism);
         ResultUnits units = reading.inUse(set);
         StatedOrigins origins = StatedOrigins.of(set.aquifer(), set.workbench().origins());
-        points.setAll(Answer.of(result, origins, Wording.typeset(units)).points());
+        points.setAll(Answer.of(result, origins, wording(units)).points());
         warnings.addAll(set.workbench().warnings());
         warnings.addAll(record.warnings());
         notes.addAll(set.workbench().notes());
@@ -174,14 +199,19 @@ public final class ClosureModel {
             leads.setAll(ClosureLeads.of(set.aquifer(), result));
             result.whereabouts().largest().forEach(cell -> spots.add(spot(set, cell, units)));
         }
-        belongs.set(BudgetShown.whole(set, record, result.prism()).orElseThrow().whose(set));
+        belongs.set(BudgetShown.whole(set, record, result.prism())
+                .orElseThrow()
+                .whose(set, session.numbers().get()));
     }
 
-    private static Spot spot(OpenSet set, HotSpot cell, ResultUnits units) {
+    private Wording wording(ResultUnits units) {
+        return Wording.typeset(units, session.numbers().get()::of);
+    }
+
+    private Spot spot(OpenSet set, HotSpot cell, ResultUnits units) {
         String where = Words.of(
                 "closure.cell", set.aquifer().layers().get(cell.layer()).name(), cell.row() + 1, cell.column() + 1);
-        Wording words = Wording.typeset(units);
-        String imbalance = words.rate(cell.imbalance(), 1);
+        String imbalance = wording(units).rate(cell.imbalance(), 1);
         return new Spot(cell, CellPlace.of(set.aquifer().grid(), cell), where, imbalance);
     }
 }

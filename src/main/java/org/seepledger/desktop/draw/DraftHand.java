@@ -50,7 +50,7 @@ public final class DraftHand implements Hand {
     }
 
     private boolean isStroke() {
-        return tool() == Tool.POLYGON || tool() == Tool.ISLAND || tool() == Tool.SPLIT;
+        return tool() == Tool.POLYGON || tool() == Tool.ISLAND || tool() == Tool.SPLIT || tool() == Tool.SECTION;
     }
 
     @Override

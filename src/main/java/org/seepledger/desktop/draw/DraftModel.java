@@ -11,6 +11,8 @@ import javafx.beans.property.ReadOnlyLongWrapper;
 import javafx.beans.property.SimpleObjectProperty;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.GriddedValues;
+import org.seepledger.aquifer.Layer;
+import org.seepledger.desktop.session.Drafting;
 import org.seepledger.desktop.session.DrawnShapes;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.words.Words;
@@ -21,7 +23,7 @@ import org.seepledger.sketch.Refusal;
 import org.seepledger.sketch.Shape;
 
 /** The drawing of prisms with all its steps; each change is told to the session. */
-public final class DraftModel {
+public final class DraftModel implements Drafting {
 
     private final Session session;
     private final ObjectProperty<Tool> tool = new SimpleObjectProperty<>(Tool.SELECT);
@@ -38,9 +40,9 @@ public final class DraftModel {
     public DraftModel(Session session) {
         this.session = session;
         session.demand().addListener((demand, before, after) -> {
-            if (after == Session.Demand.DRAW_PRISM) {
+            if (after == Session.Demand.DRAW_PRISM || after == Session.Demand.DRAW_SECTION) {
                 session.demand().set(Session.Demand.NONE);
-                choose(Tool.POLYGON);
+                choose(after == Session.Demand.DRAW_PRISM ? Tool.POLYGON : Tool.SECTION);
             }
         });
     }
@@ -78,13 +80,14 @@ public final class DraftModel {
     }
 
     private void publish(boolean settled) {
-        int layers =
-                session.set().get().map(set -> set.aquifer().layers().size()).orElse(1);
+        List<Layer> layers =
+                session.set().get().map(set -> set.aquifer().layers()).orElse(List.of());
         session.drawing()
                 .set(new org.seepledger.desktop.session.Drawing(
                         session.drawing().get().revision() + 1,
                         history.current().shapes().stream()
-                                .map(shape -> shape.prism(layers, (surface, lid) -> surfaces.get(surface)))
+                                .map(shape -> shape.prism(
+                                        Math.max(1, layers.size()), (limit, lid) -> surface(layers, limit, lid)))
                                 .toList(),
                         settled));
         tellShapes();
@@ -94,17 +97,15 @@ public final class DraftModel {
         version.set(version.get() + 1);
     }
 
+    private GriddedValues surface(List<Layer> layers, Limit limit, String lid) {
+        return limit instanceof Limit.Layer layer ? layer.among(layers, lid) : surfaces.get(limit);
+    }
+
     private void tellShapes() {
         session.shapes().set(new DrawnShapes(history.settled(), !isUnsaved()));
     }
 
-    /**
-     * Takes a step at once, or tells in the status line why it is refused.
-     *
-     * @param name the key of the step's name
-     * @param change makes the next drawing
-     * @return whether it was taken
-     */
+    @Override
     public boolean step(String name, UnaryOperator<Drawing> change) {
         return tried(() -> {
             history.step(Words.of(name), change.apply(history.current()));
@@ -112,29 +113,33 @@ public final class DraftModel {
         });
     }
 
-    void beginGesture(String name) {
+    @Override
+    public void beginGesture(String name) {
         history.begin(Words.of(name));
     }
 
-    /** Shows what a gesture would do; what is refused leaves the last preview. */
-    void preview(UnaryOperator<Drawing> change) {
+    @Override
+    public void preview(UnaryOperator<Drawing> change) {
         tried(() -> {
             history.preview(change.apply(history.settled()));
             publish(false);
         });
     }
 
-    void commitGesture() {
+    @Override
+    public void commitGesture() {
         history.commit();
         publish(true);
     }
 
-    void cancelGesture() {
+    @Override
+    public void cancelGesture() {
         history.cancel();
         publish(true);
     }
 
-    boolean isGesturing() {
+    @Override
+    public boolean isGesturing() {
         return history.isGesturing();
     }
 
@@ -200,7 +205,7 @@ public final class DraftModel {
         return history.settled();
     }
 
-    /** {@return the selected shape, if there is one} */
+    @Override
     public Optional<Shape> selected() {
         return history.current().find(session.selected().get());
     }

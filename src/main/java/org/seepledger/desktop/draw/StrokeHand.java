@@ -3,14 +3,16 @@ package org.seepledger.desktop.draw;
 import java.util.List;
 import java.util.Optional;
 import org.seepledger.desktop.map.Touch;
+import org.seepledger.picture.SectionLine;
 import org.seepledger.sketch.Drawing;
 import org.seepledger.sketch.Nearness;
 import org.seepledger.sketch.Place;
+import org.seepledger.sketch.Refusal;
 import org.seepledger.sketch.Shape;
 import org.seepledger.sketch.Snapping;
 import org.seepledger.sketch.Stroke;
 
-/** Draws place by place: a new prism, an island, or the line that cuts a prism. */
+/** Draws place by place: a new prism, an island, the line that cuts a prism, or that of a section. */
 final class StrokeHand {
 
     private final DraftModel model;
@@ -30,8 +32,9 @@ final class StrokeHand {
     void press(Touch touch) {
         hover(touch);
         Place place = pointer.orElseThrow();
-        boolean onFirst = stroke.places().size() > 2
-                && model.tool().get() != Tool.SPLIT
+        boolean closes = model.tool().get() == Tool.POLYGON || model.tool().get() == Tool.ISLAND;
+        boolean onFirst = closes
+                && stroke.places().size() > 2
                 && stroke.places().get(0).distance(new Place(touch.x(), touch.y()))
                         <= Nearness.ofPixel(touch.pixel()).vertex();
         if (onFirst) {
@@ -67,6 +70,7 @@ final class StrokeHand {
                         .map(shape -> model.step(
                                 "step.split", drawing -> drawing.split(shape.name(), stroke.places(), model.near())))
                         .orElse(false);
+            case SECTION -> section();
             default -> draw();
         };
         if (done) {
@@ -81,6 +85,17 @@ final class StrokeHand {
 
     private boolean draw() {
         return Fresh.prism(model, "step.polygon", stroke::closed);
+    }
+
+    private boolean section() {
+        try {
+            SectionLine line = new SectionLine(stroke.places());
+            model.session().sectionLine().set(Optional.of(line));
+            return true;
+        } catch (Refusal refusal) {
+            model.session().status().set(refusal.getMessage());
+            return false;
+        }
     }
 
     List<Place> places() {

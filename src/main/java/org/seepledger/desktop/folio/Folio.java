@@ -39,10 +39,12 @@ public final class Folio {
     private final BorderPane pages = new BorderPane();
     private final ToggleGroup chosen = new ToggleGroup();
     private final HBox marks = new HBox();
+    private final Reading reading;
     private final LiveBudget live;
+    private final LivePlume plumes;
     private final Session session;
     private final LedgerModel ledger;
-    private final Node ribbon;
+    private final ChartView ribbon;
 
     /**
      * Builds the panes.
@@ -55,18 +57,18 @@ public final class Folio {
      */
     public Folio(Session session, Tasks tasks, FileDialogs dialogs, CopyBoard copies, ObservableValue<Theme> theme) {
         this.session = session;
-        Reading reading = new Reading(session);
+        this.reading = new Reading(session);
         this.live = new LiveBudget(session, tasks);
         new FaceFeed(session, live, reading).begin();
         SoluteLook look = new SoluteLook(session);
-        LivePlume plumes = new LivePlume(session, look, tasks);
+        this.plumes = new LivePlume(session, look, tasks);
         this.ledger = new LedgerModel(session, live, reading, plumes, new MassReading(session, reading), copies);
         pages.setId("folio");
         pages.getStyleClass().add("sl-folio");
         marks.getStyleClass().add("sl-marks");
         marks.setId("folio-marks");
         add("folio.ledger", new LedgerView(ledger));
-        add("folio.answers", new ClosureView(new ClosureModel(session, live, reading), theme));
+        add("folio.answers", new ClosureView(new ClosureModel(session, live, reading, tasks), theme));
         add("folio.exchange", new ExchangeView(new ExchangeModel(session, live, reading, copies), theme));
         // Before the model, which takes the question away.
         session.asked().addListener((asked, before, after) -> after.ifPresent(row -> open(ORIGIN)));
@@ -103,13 +105,19 @@ public final class Folio {
     }
 
     /** {@return the ribbon of time} */
-    public Node ribbon() {
-        return ribbon;
+    public Shelf.Page ribbon() {
+        return new Shelf.Page("shelf.time", ribbon.bar(), ribbon);
+    }
+
+    /** {@return how figures are read} */
+    public Reading reading() {
+        return reading;
     }
 
     /** Works out again what was stopped or failed. */
     public void again() {
         live.again();
+        plumes.again();
     }
 
     /** {@return what can be done here} */

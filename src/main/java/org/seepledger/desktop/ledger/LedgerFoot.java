@@ -47,7 +47,7 @@ final class LedgerFoot extends GridPane {
         Label name = new Label(row.label());
         name.getStyleClass().add("sl-muted");
         name.setMinWidth(USE_PREF_SIZE);
-        Label figure = new Label(row.text(row.net()));
+        Label figure = new Label(model.text(row, row.net()));
         figure.getStyleClass().addAll("sl-figure", "sl-strong");
         figure.setMinWidth(USE_PREF_SIZE);
         add(name, place / HIGH * 2, place % HIGH);

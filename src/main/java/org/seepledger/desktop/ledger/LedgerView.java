@@ -107,7 +107,7 @@ public final class LedgerView extends BorderPane {
         column.getStyleClass().add("sl-numbers");
         column.setMinWidth(84);
         column.setPrefWidth(92);
-        return shown(column, new NumberCell.Factory(value));
+        return shown(column, new NumberCell.Factory(value, model));
     }
 
     /** The net with non-detects as something else; of solutes alone. */
@@ -121,7 +121,7 @@ public final class LedgerView extends BorderPane {
         column.setMinWidth(BRACKET);
         column.setPrefWidth(BRACKET);
         column.visibleProperty().bind(model.solute().isNotEmpty());
-        return shown(column, new NumberCell.Factory(value));
+        return shown(column, new NumberCell.Factory(value, model));
     }
 
     private TableColumn<LedgerRow, LedgerRow> scaleColumn() {

@@ -16,7 +16,10 @@ import org.seepledger.prism.Ring;
 import org.seepledger.prism.Side;
 import org.seepledger.unit.Figures;
 
-/** The net flow through each face as an arrow across its longest side, its width in proportion. */
+/**
+ * The net flow through each face as an arrow across its longest side, its width in proportion. Gain and loss have their colours
+ * within a dark rim and a light one, since alone they would not stand out from every colour of the map.
+ */
 final class FlowArrows {
 
     private static final double HALF = 20;
@@ -90,7 +93,8 @@ final class FlowArrows {
                 face.x() + face.outX() * reach,
                 face.y() + face.outY() * reach,
                 width);
-        marks.add(arrow.mark(fill(net), Mark.Stroke.of(Ink.Token.PAPER, 1.4)));
+        marks.add(arrow.mark(fill(net), Mark.Stroke.of(Ink.Token.PAPER, 3.6)));
+        marks.add(arrow.mark(fill(net), Mark.Stroke.of(Ink.Token.TEXT, 1)));
         for (double along : new double[] {-CORE, 0, CORE}) {
             double x = face.x() + along * face.outX();
             double y = face.y() + along * face.outY();
@@ -115,7 +119,6 @@ final class FlowArrows {
         double x = face.x() + towardX * (HALF + 6);
         double y = face.y() + towardY * (HALF + 8) + 0.35 * SIZE;
         Mark.Anchor anchor = towardX > 0.3 ? Mark.Anchor.START : towardX < -0.3 ? Mark.Anchor.END : Mark.Anchor.MIDDLE;
-        Ink ink = net > 0 ? Ink.Token.GAIN : Ink.Token.LOSS;
-        return new Mark.Text(x, y, words, SIZE, anchor, ink, true, true, 0);
+        return new Mark.Text(x, y, words, SIZE, anchor, Ink.Token.TEXT, true, true, 0);
     }
 }

@@ -102,7 +102,7 @@ final class Lettering {
     }
 
     private List<WellPlace> nearWells() {
-        return model.wells().get().stream()
+        return model.session().wells().get().stream()
                 .filter(well -> OnScreen.isNear(camera.x(well.x()), camera.y(well.y()), camera))
                 .toList();
     }
@@ -148,10 +148,11 @@ final class Lettering {
     private void well(WellPlace well) {
         double x = camera.x(well.x());
         double y = camera.y(well.y());
-        Ink ink = well.rate() < 0 ? Ink.Token.LOSS : well.rate() > 0 ? Ink.Token.GAIN : Ink.Token.MUTED;
-        marks.add(round(x, y, WELL, Ink.Token.PAPER, Optional.of(Mark.Stroke.of(ink, 2))));
+        marks.add(round(x, y, WELL, Ink.Token.PAPER, Optional.of(Mark.Stroke.of(Ink.Token.PAPER, 4.4))));
+        marks.add(round(x, y, WELL, Ink.Token.PAPER, Optional.of(Mark.Stroke.of(Ink.Token.TEXT, 1.8))));
         if (well.rate() != 0) {
-            marks.add(round(x, y, well.rate() < 0 ? 2.2 : 1.2, ink, Optional.empty()));
+            Ink ink = well.rate() < 0 ? Ink.Token.LOSS : Ink.Token.GAIN;
+            marks.add(round(x, y, well.rate() < 0 ? 2.4 : 1.4, ink, Optional.empty()));
         }
         String name = org.seepledger.picture.Lettering.fitted(well.name(), SIZE, LONGEST_NAME);
         List<Mark.Text> choices = Labels.around(x, y, WELL + APART + 1, name, SIZE).stream()

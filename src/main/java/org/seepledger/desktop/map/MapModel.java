@@ -2,6 +2,7 @@ package org.seepledger.desktop.map;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
@@ -9,8 +10,10 @@ import javafx.beans.property.SimpleObjectProperty;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
+import org.seepledger.desktop.task.EntryGuard;
+import org.seepledger.desktop.task.Lane;
 import org.seepledger.desktop.task.Tasks;
-import org.seepledger.job.WellPlace;
+import org.seepledger.desktop.words.FaultWords;
 import org.seepledger.report.CellPlace;
 
 /** What the map shows: which part of it, which values, and where the cursor is. */
@@ -29,7 +32,7 @@ public final class MapModel {
     private final Overlays overlays = new Overlays();
     private final ObjectProperty<Camera> camera = new SimpleObjectProperty<>(new Camera(0, 0, 0, 0, 1));
     private final ReadOnlyObjectWrapper<Optional<Readout>> readout = new ReadOnlyObjectWrapper<>(Optional.empty());
-    private final ReadOnlyObjectWrapper<List<WellPlace>> wells = new ReadOnlyObjectWrapper<>(List.of());
+    private final Lane lookingForWells;
     private final ValuesModel values;
     private final FluxModel flux;
     private final ContourModel contours;
@@ -46,6 +49,7 @@ public final class MapModel {
         this.values = new ValuesModel(session, tasks);
         this.contours = new ContourModel(values, overlays, tasks);
         this.flux = new FluxModel(session, this, tasks);
+        this.lookingForWells = tasks.latest("task.wells");
         session.set().addListener((set, before, after) -> {
             framed = false;
             frame();
@@ -53,6 +57,7 @@ public final class MapModel {
         });
         session.interval().addListener((interval, before, after) -> findWells());
         session.target().addListener((target, before, after) -> after.ifPresent(this::goTo));
+        new MapOffer(session, this).begin();
     }
 
     /** Puts a cell into the middle, near enough to be seen among its neighbours. */
@@ -68,8 +73,18 @@ public final class MapModel {
 
     private void findWells() {
         int interval = session.interval().get();
-        wells.set(
-                session.set().get().map(set -> set.workbench().wells(interval)).orElse(List.of()));
+        lookingForWells.cancel();
+        session.set()
+                .get()
+                .ifPresentOrElse(
+                        set -> lookingForWells.run(
+                                progress -> {
+                                    EntryGuard.enter();
+                                    return set.workbench().wells(interval);
+                                },
+                                session.wells()::set,
+                                fault -> session.status().set(FaultWords.of(fault))),
+                        () -> session.wells().set(List.of()));
     }
 
     /**
@@ -155,6 +170,7 @@ public final class MapModel {
      */
     public void point(double x, double y) {
         Camera seen = camera.get();
+        session.along().set(SectionTrace.along(session.sectionLine().get(), seen, x, y));
         readout.set(session.set()
                 .get()
                 .map(set -> Readout.at(
@@ -162,12 +178,14 @@ public final class MapModel {
                         seen.mapX(x),
                         seen.mapY(y),
                         session.layer().get(),
-                        values.view().get())));
+                        values.view().get(),
+                        session.numbers().get())));
     }
 
     /** The cursor has left. */
     public void leave() {
         readout.set(Optional.empty());
+        session.along().set(OptionalDouble.empty());
     }
 
     /** {@return what the window looks at} */
@@ -196,10 +214,6 @@ public final class MapModel {
 
     ContourModel contours() {
         return contours;
-    }
-
-    ReadOnlyObjectProperty<List<WellPlace>> wells() {
-        return wells.getReadOnlyProperty();
     }
 
     /** {@return where the cursor is, if it is on the map} */

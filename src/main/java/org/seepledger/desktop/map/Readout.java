@@ -4,6 +4,7 @@ import java.util.Locale;
 import java.util.Optional;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.Grid;
+import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.unit.Figures;
 
@@ -16,21 +17,21 @@ import org.seepledger.unit.Figures;
  */
 public record Readout(String place, String cell, String value) {
 
-    static Readout at(Aquifer aquifer, double x, double y, int layer, Optional<LayerView> view) {
+    static Readout at(Aquifer aquifer, double x, double y, int layer, Optional<LayerView> view, NumberForm form) {
         Grid grid = aquifer.grid();
         int column = grid.x().cellAt(grid.localX(x, y));
         int fromSouth = grid.y().cellAt(grid.localY(x, y));
         boolean on = column >= 0 && column < grid.columns() && fromSouth >= 0 && fromSouth < grid.rows();
-        String place = "x " + coordinate(x) + "   y " + coordinate(y);
+        String place = form.of("x " + coordinate(x) + "   y " + coordinate(y));
         if (!on) {
             return new Readout(place, Words.of("map.off"), "");
         }
         String cell = Words.of("map.cell", grid.flipped(fromSouth) + 1, column + 1, layer + 1);
         return new Readout(
-                place, cell, view.map(shown -> value(shown, grid, x, y)).orElse(""));
+                place, cell, view.map(shown -> value(shown, grid, x, y, form)).orElse(""));
     }
 
-    private static String value(LayerView shown, Grid grid, double x, double y) {
+    private static String value(LayerView shown, Grid grid, double x, double y, NumberForm form) {
         Lattice lattice = shown.pyramid().lattice();
         int column = (int) (grid.localX(x, y) / lattice.stepX());
         int fromSouth = (int) (grid.localY(x, y) / lattice.stepY());
@@ -42,7 +43,7 @@ public record Readout(String place, String cell, String value) {
                 : Words.of(
                         "map.value",
                         label,
-                        Figures.typeset(value),
+                        form.of(Figures.typeset(value)),
                         shown.request().quantity().unit());
     }
 

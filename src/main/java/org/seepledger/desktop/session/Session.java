@@ -2,6 +2,7 @@ package org.seepledger.desktop.session;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.TreeMap;
 import javafx.beans.property.IntegerProperty;
 import javafx.beans.property.ObjectProperty;
@@ -14,8 +15,12 @@ import javafx.beans.property.StringProperty;
 import javafx.collections.FXCollections;
 import javafx.collections.ObservableMap;
 import org.seepledger.desktop.notice.Notices;
+import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.job.ShownPicture;
 import org.seepledger.job.TracedNumber;
+import org.seepledger.job.WellPlace;
+import org.seepledger.picture.Section;
+import org.seepledger.picture.SectionLine;
 import org.seepledger.prism.Prism;
 import org.seepledger.report.CellPlace;
 
@@ -34,9 +39,15 @@ public final class Session {
     private final ObjectProperty<Optional<RowAsked>> asked = new SimpleObjectProperty<>(Optional.empty());
     private final StringProperty solute = new SimpleStringProperty("");
     private final StringProperty status = new SimpleStringProperty("");
+    private final ObjectProperty<NumberForm> numbers = new SimpleObjectProperty<>(NumberForm.SPACE_POINT);
     private final Notices notices = new Notices();
+    private final ObjectProperty<List<WellPlace>> wells = new SimpleObjectProperty<>(List.of());
     private final ObjectProperty<FaceFlows> faceFlows = new SimpleObjectProperty<>(FaceFlows.NONE);
     private final ObjectProperty<Optional<CellPlace>> target = new SimpleObjectProperty<>(Optional.empty());
+    private final ObjectProperty<Optional<Draped>> draped = new SimpleObjectProperty<>(Optional.empty());
+    private final ObjectProperty<Optional<SectionLine>> sectionLine = new SimpleObjectProperty<>(Optional.empty());
+    private final ObjectProperty<Optional<Section>> section = new SimpleObjectProperty<>(Optional.empty());
+    private final ObjectProperty<OptionalDouble> along = new SimpleObjectProperty<>(OptionalDouble.empty());
     private final ObjectProperty<Demand> demand = new SimpleObjectProperty<>(Demand.NONE);
 
     /** What one pane asks of the map. */
@@ -46,7 +57,9 @@ public final class Session {
         /** To show where the selected prism does not close. */
         SHOW_IMBALANCE,
         /** To begin to draw a prism. */
-        DRAW_PRISM
+        DRAW_PRISM,
+        /** To begin to draw the line of a section. */
+        DRAW_SECTION
     }
 
     /**
@@ -56,6 +69,8 @@ public final class Session {
      */
     public void show(Optional<OpenSet> opened) {
         lit.set("");
+        draped.set(Optional.empty());
+        sectionLine.set(Optional.empty());
         marked.set(List.of());
         faceFlows.set(FaceFlows.NONE);
         solute.set("");
@@ -111,6 +126,11 @@ public final class Session {
         return lit;
     }
 
+    /** {@return how numbers are written in the window} */
+    public ObjectProperty<NumberForm> numbers() {
+        return numbers;
+    }
+
     /** {@return the cells that are lit up, since a number rests on values in them} */
     public ObjectProperty<List<TracedNumber.Cell>> marked() {
         return marked;
@@ -136,6 +156,11 @@ public final class Session {
         return status;
     }
 
+    /** {@return the wells with their rates in the interval looked at} */
+    public ObjectProperty<List<WellPlace>> wells() {
+        return wells;
+    }
+
     /** {@return what flows through the selected prism's faces, for arrows on the map} */
     public ObjectProperty<FaceFlows> faceFlows() {
         return faceFlows;
@@ -144,6 +169,26 @@ public final class Session {
     /** {@return the place that a pane asks the map to go to; whoever goes there empties it} */
     public ObjectProperty<Optional<CellPlace>> target() {
         return target;
+    }
+
+    /** {@return what lies over the map, and in which colours} */
+    public ObjectProperty<Optional<Draped>> draped() {
+        return draped;
+    }
+
+    /** {@return the line that the section follows, if one is drawn} */
+    public ObjectProperty<Optional<SectionLine>> sectionLine() {
+        return sectionLine;
+    }
+
+    /** {@return the section as it was last worked out, to be drawn by {@link org.seepledger.picture.SectionPicture}} */
+    public ObjectProperty<Optional<Section>> section() {
+        return section;
+    }
+
+    /** {@return how far along the section's line somebody points, on the map or in the section, in plan units} */
+    public ObjectProperty<OptionalDouble> along() {
+        return along;
     }
 
     /** {@return what a pane asks of the map; whoever meets it sets it back to none} */

@@ -2,6 +2,8 @@ package org.seepledger.desktop.shell;
 
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
+import javafx.scene.control.ScrollPane;
+import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.ledger.Disclaimer;
@@ -15,18 +17,21 @@ final class CautionPage extends VBox {
         setMaxSize(600, USE_PREF_SIZE);
         Label title = new Label(Words.of("caution.title"));
         title.getStyleClass().add("sl-heading");
-        getChildren().add(title);
+        VBox sentences = new VBox(12);
         Disclaimer.sentences().forEach(sentence -> {
             Label line = new Label(sentence);
             line.setWrapText(true);
             line.setMinHeight(USE_PREF_SIZE);
-            getChildren().add(line);
+            sentences.getChildren().add(line);
         });
+        ScrollPane scroll = new ScrollPane(sentences);
+        scroll.setFitToWidth(true);
+        setVgrow(scroll, Priority.ALWAYS);
         Button done = new Button(Words.of("close"));
         done.setDefaultButton(true);
         done.setCancelButton(true);
         done.setOnAction(pressed -> close.run());
-        getChildren().add(done);
+        getChildren().addAll(title, scroll, done);
     }
 
     @Override

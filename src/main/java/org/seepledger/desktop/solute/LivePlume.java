@@ -97,6 +97,12 @@ public final class LivePlume {
         return whole.state();
     }
 
+    /** Asks again what was stopped or failed. */
+    public void again() {
+        now.again();
+        whole.again();
+    }
+
     private void begin() {
         now.forget(nothing());
         whole.forget(nothing());

@@ -7,6 +7,7 @@ import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
 import org.seepledger.desktop.words.FaultWords;
 import org.seepledger.desktop.words.Words;
+import org.seepledger.progress.Cancelled;
 import org.seepledger.progress.Progress;
 
 /**
@@ -170,9 +171,19 @@ public final class Inquiry<Q, A> {
     private void notAnswered(Q question, Throwable fault) {
         asked = Optional.empty();
         if (wanted.equals(Optional.of(question))) {
-            state.set(PaneState.failed(FaultWords.of(fault)));
+            state.set(PaneState.failed(fault instanceof Cancelled ? Words.of("stopped.again") : FaultWords.of(fault)));
         }
         askNext(question);
+    }
+
+    /** Asks again what was stopped or failed. */
+    public void again() {
+        if (asked.isEmpty() && state.get().phase() == PaneState.Phase.FAILED) {
+            wanted.ifPresent(question -> {
+                state.set(working());
+                ask(question, Duration.ZERO);
+            });
+        }
     }
 
     private void askNext(Q before) {

@@ -1,6 +1,5 @@
 package org.seepledger.desktop.welcome;
 
-import java.io.File;
 import java.nio.file.Path;
 import javafx.collections.ListChangeListener;
 import javafx.collections.ObservableList;
@@ -10,8 +9,6 @@ import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.Tooltip;
-import javafx.scene.input.DragEvent;
-import javafx.scene.input.TransferMode;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.StackPane;
@@ -49,9 +46,7 @@ public final class WelcomeView extends StackPane {
         scroll.setFitToWidth(true);
         scroll.setFitToHeight(true);
         getChildren().add(scroll);
-        setOnDragOver(this::onDragOver);
-        setOnDragExited(drag -> drop.getStyleClass().remove("over"));
-        setOnDragDropped(this::onDropped);
+        FolderDrop.on(this, model, this::mark);
     }
 
     private static Node title() {
@@ -170,20 +165,10 @@ public final class WelcomeView extends StackPane {
         return drop;
     }
 
-    private void onDragOver(DragEvent drag) {
-        if (drag.getDragboard().hasFiles()) {
-            drag.acceptTransferModes(TransferMode.COPY, TransferMode.LINK);
-            if (!drop.getStyleClass().contains("over")) {
-                drop.getStyleClass().add("over");
-            }
-        }
-        drag.consume();
-    }
-
-    private void onDropped(DragEvent drag) {
+    private void mark(boolean over) {
         drop.getStyleClass().remove("over");
-        model.drop(drag.getDragboard().getFiles().stream().map(File::toPath).toList());
-        drag.setDropCompleted(true);
-        drag.consume();
+        if (over) {
+            drop.getStyleClass().add("over");
+        }
     }
 }
