@@ -34,11 +34,7 @@ class DrawingWindowTest {
 
     @BeforeEach
     void open() throws IOException {
-        try (var sample = Files.list(Path.of("sample-aquifers/valley"))) {
-            for (Path file : sample.toList()) {
-                Files.copy(file, folder.resolve(file.getFileName()));
-            }
-        }
+        ValleyCopy.into(folder);
         window = new OpenWindow(1600, 1000);
         openSet();
     }
