@@ -1,14 +1,21 @@
 package org.seepledger.desktop;
 
+import java.io.IOException;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.concurrent.Callable;
 import java.util.concurrent.TimeUnit;
 import java.util.function.BooleanSupplier;
+import java.util.stream.Stream;
 import javafx.application.Platform;
+import javafx.geometry.Bounds;
+import javafx.geometry.Point2D;
+import javafx.scene.Node;
 import javafx.scene.control.ChoiceBox;
 import javafx.scene.input.KeyCode;
 import javafx.stage.Stage;
+import org.seepledger.desktop.map.Camera;
 import org.seepledger.desktop.port.GivenAnswers;
 import org.seepledger.desktop.task.BackgroundTasks;
 import org.seepledger.desktop.task.Tasks;
@@ -72,6 +79,35 @@ public final class OpenWindow implements AutoCloseable {
     public void openSet(Path folder) {
         robot.interact(() -> assembly.welcome().open(folder));
         await(() -> assembly.session().set().get().isPresent());
+    }
+
+    /** Opens a copy of the valley, in which a test may write, and waits until its map is there. */
+    void openValley(Path copy) throws IOException {
+        try (Stream<Path> sample = Files.list(Path.of("sample-aquifers/valley"))) {
+            for (Path file : sample.toList()) {
+                Files.copy(file, copy.resolve(file.getFileName()));
+            }
+        }
+        openMap(copy);
+    }
+
+    /** Opens a set and waits until its map is there. */
+    void openMap(Path folder) {
+        openSet(folder);
+        await(() -> assembly.map().values().scale().get().isPresent());
+        settle();
+    }
+
+    /** Where a node begins on the screen. */
+    static Point2D origin(Node node) {
+        Bounds bounds = node.localToScreen(node.getBoundsInLocal());
+        return new Point2D(bounds.getMinX(), bounds.getMinY());
+    }
+
+    /** Where a place of the map is on the screen. */
+    Point2D onMap(double mapX, double mapY) {
+        Camera camera = assembly.map().camera().get();
+        return origin(robot.lookup("#map-canvas").query()).add(camera.x(mapX), camera.y(mapY));
     }
 
     /** Waits until something holds. */

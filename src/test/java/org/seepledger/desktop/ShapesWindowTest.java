@@ -4,13 +4,10 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import java.io.IOException;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
-import javafx.geometry.Bounds;
 import javafx.geometry.Point2D;
 import javafx.geometry.Pos;
-import javafx.scene.Node;
 import javafx.scene.control.Label;
 import javafx.scene.input.ClipboardContent;
 import javafx.scene.input.KeyCode;
@@ -22,7 +19,6 @@ import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
-import org.seepledger.desktop.map.Camera;
 import org.seepledger.sketch.Drawing;
 
 /** Shapes made of others, by hand in the real window: split, merged, with islands and buffers. */
@@ -35,15 +31,8 @@ class ShapesWindowTest {
 
     @BeforeEach
     void open() throws IOException {
-        try (var sample = Files.list(Path.of("sample-aquifers/valley"))) {
-            for (Path file : sample.toList()) {
-                Files.copy(file, folder.resolve(file.getFileName()));
-            }
-        }
         window = new OpenWindow(1600, 1000);
-        window.openSet(folder);
-        window.await(() -> window.assembly().map().values().scale().get().isPresent());
-        window.settle();
+        window.openValley(folder);
     }
 
     @AfterEach
@@ -52,10 +41,7 @@ class ShapesWindowTest {
     }
 
     private Point2D at(double mapX, double mapY) {
-        Node canvas = window.robot.lookup("#map-canvas").query();
-        Bounds bounds = canvas.localToScreen(canvas.getBoundsInLocal());
-        Camera camera = window.assembly().map().camera().get();
-        return new Point2D(bounds.getMinX() + camera.x(mapX), bounds.getMinY() + camera.y(mapY));
+        return window.onMap(mapX, mapY);
     }
 
     private Drawing drawing() {
