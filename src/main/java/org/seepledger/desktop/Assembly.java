@@ -71,7 +71,7 @@ final class Assembly {
                 tray);
         draft.version().addListener((version, before, after) -> mapView.repaint());
         draft.tool().addListener((tool, before, after) -> mapView.repaint());
-        Folio folio = new Folio(session, outside.tasks(), outside.copies(), shell.theme());
+        Folio folio = new Folio(session, outside.tasks(), outside.copies(), outside.dialogs(), shell.theme());
         Slots slots = new Slots(
                 new WelcomeView(welcome),
                 new ShowingBar(map),

@@ -14,6 +14,15 @@ import java.util.stream.IntStream;
  */
 public record Panels(double[] areas, double[] flows, double[] rates) {
 
+    /**
+     * {@return one of the parts}
+     *
+     * @param part which, from 0
+     */
+    public Panels only(int part) {
+        return new Panels(new double[] {areas[part]}, new double[] {flows[part]}, new double[] {rates[part]});
+    }
+
     /** {@return the area of all} */
     public double area() {
         return Arrays.stream(areas).sum();

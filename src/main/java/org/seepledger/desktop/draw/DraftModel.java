@@ -12,10 +12,13 @@ import javafx.beans.property.SimpleObjectProperty;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.GriddedValues;
 import org.seepledger.desktop.session.Session;
+import org.seepledger.desktop.session.Transects;
 import org.seepledger.desktop.words.Words;
+import org.seepledger.sketch.ControlLine;
 import org.seepledger.sketch.Drawing;
 import org.seepledger.sketch.History;
 import org.seepledger.sketch.Limit;
+import org.seepledger.sketch.Place;
 import org.seepledger.sketch.Refusal;
 import org.seepledger.sketch.Shape;
 
@@ -40,6 +43,9 @@ public final class DraftModel {
             if (after == Session.Demand.DRAW_PRISM) {
                 session.demand().set(Session.Demand.NONE);
                 choose(Tool.POLYGON);
+            } else if (after == Session.Demand.DRAW_TRANSECT) {
+                session.demand().set(Session.Demand.NONE);
+                choose(Tool.TRANSECT);
             }
         });
     }
@@ -86,10 +92,27 @@ public final class DraftModel {
                                 .map(shape -> shape.prism(layers, (surface, lid) -> surfaces.get(surface)))
                                 .toList(),
                         settled));
+        publishLines(settled);
         if (history.current().find(session.selected().get()).isEmpty()) {
             session.selected().set("");
         }
         version.set(version.get() + 1);
+    }
+
+    private void publishLines(boolean settled) {
+        session.transects().set(new Transects(drawing().lines(), settled));
+        if (selectedLine().isEmpty()) {
+            session.transect()
+                    .set(drawing().lines().stream()
+                            .map(ControlLine::name)
+                            .findFirst()
+                            .orElse(""));
+        }
+    }
+
+    /** {@return the transect that is chosen, if there is one} */
+    Optional<ControlLine> selectedLine() {
+        return drawing().line(session.transect().get());
     }
 
     /**
@@ -205,6 +228,9 @@ public final class DraftModel {
      * @param chosen the tool
      */
     public void choose(Tool chosen) {
+        if (chosen == Tool.TRANSECT && !hasSolutes()) {
+            return;
+        }
         if (chosen.needsPrism() && selected().isEmpty()) {
             session.status().set(Words.of("tool.needs"));
             return;
@@ -245,6 +271,16 @@ public final class DraftModel {
 
     Optional<Grid> grid() {
         return session.set().get().map(set -> set.aquifer().grid());
+    }
+
+    /** {@return whether the open set has solutes, so that transects mean something} */
+    boolean hasSolutes() {
+        return session.set().get().filter(set -> !set.solutes().isEmpty()).isPresent();
+    }
+
+    /** The nearest place that a transect can have. */
+    Place onGrid(Place place) {
+        return grid().map(grid -> ControlLine.within(grid, place)).orElse(place);
     }
 
     /** How near two places count as one when prisms are cut or joined: far below what can be seen. */

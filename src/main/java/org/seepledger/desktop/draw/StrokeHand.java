@@ -10,7 +10,7 @@ import org.seepledger.sketch.Shape;
 import org.seepledger.sketch.Snapping;
 import org.seepledger.sketch.Stroke;
 
-/** Draws place by place: a new prism, an island, or the line that cuts a prism. */
+/** Draws place by place: a new prism, an island, the line that cuts a prism, or a transect. */
 final class StrokeHand {
 
     private final DraftModel model;
@@ -24,7 +24,8 @@ final class StrokeHand {
     }
 
     void hover(Touch touch) {
-        pointer = Optional.of(snapper.held(Snapping.to(model.drawing(), model.grid()), touch));
+        Place held = snapper.held(Snapping.to(model.drawing(), model.grid()), touch);
+        pointer = Optional.of(isTransect() ? model.onGrid(held) : held);
     }
 
     void press(Touch touch) {
@@ -32,6 +33,7 @@ final class StrokeHand {
         Place place = pointer.orElseThrow();
         boolean onFirst = stroke.places().size() > 2
                 && model.tool().get() != Tool.SPLIT
+                && !isTransect()
                 && stroke.places().get(0).distance(new Place(touch.x(), touch.y()))
                         <= Nearness.ofPixel(touch.pixel()).vertex();
         if (onFirst) {
@@ -67,12 +69,17 @@ final class StrokeHand {
                         .map(shape -> model.step(
                                 "step.split", drawing -> drawing.split(shape.name(), stroke.places(), model.near())))
                         .orElse(false);
+            case TRANSECT -> Fresh.transect(model, stroke.places());
             default -> draw();
         };
         if (done) {
             cancel();
             model.choose(Tool.SELECT);
         }
+    }
+
+    private boolean isTransect() {
+        return model.tool().get() == Tool.TRANSECT;
     }
 
     private Drawing island(Drawing drawing, Shape shape) {

@@ -17,7 +17,9 @@ public enum Tool {
     /** Cuts the selected prism along a line. */
     SPLIT("X"),
     /** Makes the selected prism and another one. */
-    MERGE("M");
+    MERGE("M"),
+    /** Draws a transect vertex by vertex; of sets with solutes alone. */
+    TRANSECT("L");
 
     private final String keys;
 

@@ -1,6 +1,7 @@
 package org.seepledger.desktop.folio;
 
 import java.util.List;
+import javafx.beans.property.BooleanProperty;
 import javafx.beans.value.ObservableValue;
 import javafx.scene.Node;
 import javafx.scene.control.ToggleButton;
@@ -20,12 +21,15 @@ import org.seepledger.desktop.exchange.ExchangeView;
 import org.seepledger.desktop.ledger.LedgerModel;
 import org.seepledger.desktop.ledger.LedgerView;
 import org.seepledger.desktop.port.CopyBoard;
+import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.solute.LivePlume;
 import org.seepledger.desktop.solute.MassReading;
 import org.seepledger.desktop.solute.SoluteLook;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.theme.Theme;
+import org.seepledger.desktop.transect.TransectModel;
+import org.seepledger.desktop.transect.TransectView;
 import org.seepledger.desktop.words.Words;
 
 /** All panes of the budget, on one live budget and one reading of figures. */
@@ -36,6 +40,7 @@ public final class Folio {
     private final HBox marks = new HBox();
     private final Session session;
     private final LedgerModel ledger;
+    private final TransectModel transects;
     private final Node ribbon;
 
     /**
@@ -44,16 +49,19 @@ public final class Folio {
      * @param session what the window looks at
      * @param tasks where work is done
      * @param copies where copies go
+     * @param dialogs asks for files
      * @param theme light or dark
      */
-    public Folio(Session session, Tasks tasks, CopyBoard copies, ObservableValue<Theme> theme) {
+    public Folio(Session session, Tasks tasks, CopyBoard copies, FileDialogs dialogs, ObservableValue<Theme> theme) {
         this.session = session;
         Reading reading = new Reading(session);
         LiveBudget live = new LiveBudget(session, tasks);
         new FaceFeed(session, live, reading).begin();
         SoluteLook look = new SoluteLook(session);
         LivePlume plumes = new LivePlume(session, look, tasks);
-        this.ledger = new LedgerModel(session, live, reading, plumes, new MassReading(session, reading), copies);
+        MassReading masses = new MassReading(session, reading);
+        this.ledger = new LedgerModel(session, live, reading, plumes, masses, copies);
+        this.transects = new TransectModel(session, tasks, reading, masses, copies, dialogs);
         pages.setId("folio");
         pages.getStyleClass().add("sl-folio");
         marks.getStyleClass().add("sl-marks");
@@ -61,13 +69,14 @@ public final class Folio {
         add("folio.ledger", new LedgerView(ledger));
         add("folio.answers", new ClosureView(new ClosureModel(session, live, reading), theme));
         add("folio.exchange", new ExchangeView(new ExchangeModel(session, live, reading, copies), theme));
+        ofSolutes(add("folio.transects", new TransectView(transects)), transects.open());
         marks.getChildren().add(new SubjectBox(session));
         pages.setTop(marks);
         chosen.selectToggle(chosen.getToggles().get(0));
         this.ribbon = new ChartView(new ChartModel(session, live, reading), theme);
     }
 
-    private void add(String words, Node page) {
+    private ToggleButton add(String words, Node page) {
         ToggleButton mark = new ToggleButton(Words.of(words));
         mark.setId(words.replace('.', '-'));
         mark.getStyleClass().add("sl-mark-page");
@@ -85,6 +94,23 @@ public final class Folio {
             }
         });
         marks.getChildren().add(mark);
+        return mark;
+    }
+
+    /** A page that is there only where the set has solutes. */
+    private void ofSolutes(ToggleButton mark, BooleanProperty open) {
+        mark.visibleProperty().bind(session.set().map(set -> hasSolutes()));
+        mark.managedProperty().bind(mark.visibleProperty());
+        mark.visibleProperty().addListener((visible, before, after) -> {
+            if (mark.isSelected()) {
+                open(0);
+            }
+        });
+        open.bind(mark.selectedProperty());
+    }
+
+    private boolean hasSolutes() {
+        return session.set().get().filter(set -> !set.solutes().isEmpty()).isPresent();
     }
 
     /** {@return the pages beside the map} */
@@ -104,7 +130,10 @@ public final class Folio {
                 new Action(group, "action.page.ledger", "Shortcut+1", () -> open(0)),
                 new Action(group, "action.page.answers", "Shortcut+2", () -> open(1)),
                 new Action(group, "action.page.exchange", "Shortcut+3", () -> open(2)),
-                new Action(group, "action.subject", "Shortcut+Shift+U", () -> SubjectBox.next(session)),
+                new Action(group, "action.page.transects", "Shortcut+7", this::hasSolutes, () -> open(3)),
+                new Action(group, "action.panels", "Shortcut+Shift+P", this::hasSolutes, this::openPanels),
+                new Action(
+                        group, "action.subject", "Shortcut+Shift+U", this::hasSolutes, () -> SubjectBox.next(session)),
                 new Action(group, "action.ledger.copy", "Shortcut+Shift+C", ledger::copy),
                 new Action(
                         group,
@@ -113,6 +142,11 @@ public final class Folio {
                         () -> ledger.reading()
                                 .volumes()
                                 .set(!ledger.reading().volumes().get())));
+    }
+
+    private void openPanels() {
+        open(3);
+        transects.openPanels();
     }
 
     private void open(int page) {

@@ -55,8 +55,8 @@ public final class LedgerModel {
         this.session = session;
         this.sheets = new LedgerSheets(session, live, reading, plumes, masses);
         this.copies = copies;
-        sheets.causes().forEach(cause -> cause.addListener(changed -> show()));
-        sheets.states().forEach(cause -> cause.addListener(changed -> showState()));
+        sheets.causes().forEach(cause -> cause.addListener((value, before, after) -> show()));
+        sheets.states().forEach(cause -> cause.addListener((value, before, after) -> showState()));
         arrangement.addListener((arranged, before, after) -> show());
         order.addListener((ordered, before, after) -> show());
         show();
@@ -156,8 +156,9 @@ public final class LedgerModel {
     /** Copies the rows with their units, in full precision. */
     public void copy() {
         if (!rows.isEmpty() && !belongs.get().isEmpty()) {
-            LedgerCopy copy = new LedgerCopy(belongs.get(), unit.get(), massUnit.get(), rows);
-            copies.table(copy.tabSeparated(), copy.html());
+            new LedgerCopy(belongs.get(), unit.get(), massUnit.get(), rows)
+                    .table()
+                    .on(copies);
             session.status().set(Words.of("ledger.copied", belongs.get()));
         }
     }

@@ -17,6 +17,8 @@ public final class Session {
 
     private final ReadOnlyObjectWrapper<Optional<OpenSet>> set = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final ObjectProperty<Drawing> drawing = new SimpleObjectProperty<>(Drawing.NONE);
+    private final ObjectProperty<Transects> transects = new SimpleObjectProperty<>(Transects.NONE);
+    private final StringProperty transect = new SimpleStringProperty("");
     private final IntegerProperty interval = new SimpleIntegerProperty();
     private final IntegerProperty layer = new SimpleIntegerProperty();
     private final StringProperty selected = new SimpleStringProperty("");
@@ -34,7 +36,9 @@ public final class Session {
         /** To show where the selected prism does not close. */
         SHOW_IMBALANCE,
         /** To begin to draw a prism. */
-        DRAW_PRISM
+        DRAW_PRISM,
+        /** To begin to draw a transect. */
+        DRAW_TRANSECT
     }
 
     /**
@@ -46,6 +50,8 @@ public final class Session {
         lit.set("");
         faceFlows.set(FaceFlows.NONE);
         solute.set("");
+        transect.set("");
+        transects.set(Transects.NONE);
         selected.set("");
         interval.set(0);
         layer.set(0);
@@ -61,6 +67,16 @@ public final class Session {
     /** {@return what is drawn} */
     public ObjectProperty<Drawing> drawing() {
         return drawing;
+    }
+
+    /** {@return the transects that are drawn} */
+    public ObjectProperty<Transects> transects() {
+        return transects;
+    }
+
+    /** {@return the name of the transect that is chosen; empty for none} */
+    public StringProperty transect() {
+        return transect;
     }
 
     /** {@return the interval looked at, from 0} */

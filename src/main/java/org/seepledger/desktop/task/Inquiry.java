@@ -100,7 +100,7 @@ public final class Inquiry<Q, A> {
             return false;
         }
         if (!same) {
-            state.set(working());
+            tell(working());
         }
         return !same;
     }
@@ -108,7 +108,7 @@ public final class Inquiry<Q, A> {
     private void settle() {
         lane.cancel();
         asked = Optional.empty();
-        state.set(PaneState.READY);
+        tell(PaneState.READY);
     }
 
     /** Tells that the last answer is outdated, and gives up what is being answered. */
@@ -116,7 +116,14 @@ public final class Inquiry<Q, A> {
         lane.cancel();
         asked = Optional.empty();
         wanted = Optional.empty();
-        state.set(working());
+        tell(working());
+    }
+
+    /** A state that is told again would set off whoever asks when told. */
+    private void tell(PaneState next) {
+        if (!next.equals(state.get())) {
+            state.set(next);
+        }
     }
 
     /** Old content is dimmed meanwhile, and it is said whose it is. */
@@ -133,7 +140,7 @@ public final class Inquiry<Q, A> {
         lane.cancel();
         asked = Optional.empty();
         wanted = Optional.empty();
-        state.set(why);
+        tell(why);
     }
 
     /**
@@ -161,7 +168,7 @@ public final class Inquiry<Q, A> {
     private void answered(Q question, A answer) {
         asked = Optional.empty();
         if (wanted.equals(Optional.of(question))) {
-            state.set(PaneState.READY);
+            tell(PaneState.READY);
         }
         last.set(Optional.of(new Reply<>(question, answer)));
         askNext(question);
@@ -170,7 +177,7 @@ public final class Inquiry<Q, A> {
     private void notAnswered(Q question, Throwable fault) {
         asked = Optional.empty();
         if (wanted.equals(Optional.of(question))) {
-            state.set(PaneState.failed(FaultWords.of(fault)));
+            tell(PaneState.failed(FaultWords.of(fault)));
         }
         askNext(question);
     }

@@ -122,19 +122,13 @@ public final class TransectCsv {
             begin(measured);
             cells(CsvText.text(measured.names().get(panel)), "");
             end(
-                    choice -> one(measured.panels().get(choice.ordinal()), only),
+                    choice -> measured.panels().get(choice.ordinal()).only(only),
                     Optional.empty(),
                     measured.concentration());
         }
         begin(measured);
         cells(ALL, "");
         end(choice -> measured.panels().get(choice.ordinal()), Optional.empty(), measured.concentration());
-    }
-
-    private static Panels one(Panels all, int panel) {
-        return new Panels(
-                new double[] {all.areas()[panel]}, new double[] {all.flows()[panel]}, new double[] {all.rates()[panel]
-                });
     }
 
     private void begin(MeasuredPanels measured) throws IOException {
