@@ -26,7 +26,7 @@ import picocli.CommandLine.Option;
             "  seepledger plume sample-aquifers/depot --prisms sample-aquifers/depot/prisms.geojson \\",
             "    --out plume --every year --rate-unit kg/yr --dispersion --above \"0.1 mg/L\"",
             "",
-            "Written to DIR: plume.csv (the budget), mass.csv (what is there at each instant), trend.csv"
+            "Written to DIR: report.html (to read and hand over), plume.csv (the budget), mass.csv (what is there at each instant), trend.csv"
                     + " (where it goes and how it changes), transect.csv (what crosses lines), run.json (inputs, options, warnings).",
             "Exit status: 0 done; 1 a fault of the program; 2 the command line is wrong; 3 the data are wrong;",
             "4 done, but a closure error exceeds --max-closure-error."
@@ -68,6 +68,9 @@ final class PlumeCommand implements Callable<Integer> {
     private Path panels;
 
     @Mixin
+    private ReportOptions report = new ReportOptions();
+
+    @Mixin
     private ClosureLimit limit = new ClosureLimit();
 
     PlumeCommand(Terminal terminal) {
@@ -102,7 +105,8 @@ final class PlumeCommand implements Callable<Integer> {
                 Optional.ofNullable(panels),
                 options.clip(),
                 options.threads(),
-                result.overwrite());
+                result.overwrite(),
+                report.request(terminal.clock()));
     }
 
     private Optional<PlumeRequest.Threshold> above() {

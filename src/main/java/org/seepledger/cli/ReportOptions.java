@@ -49,7 +49,7 @@ final class ReportOptions {
     @Option(
             names = "--report-amounts",
             paramLabel = "WHICH",
-            description = "Whether its tables give each rate (default) or volume.")
+            description = "Whether its tables give each rate (default) or volume (of a solute: mass).")
     private String amounts = "rate";
 
     /** What the report is to look like. */

@@ -21,6 +21,7 @@ import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.port.Questions;
 import org.seepledger.desktop.port.RecentFolders;
+import org.seepledger.desktop.running.RunningModel;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Opening;
 import org.seepledger.desktop.session.Session;
@@ -45,6 +46,8 @@ final class Assembly {
     private final DraftHand hand;
     private final DraftFiles files;
     private final Tray tray;
+    private final Folio folio;
+    private final RunningModel running;
     private final MapView mapView;
     private final ShellView view;
     private final Scene scene;
@@ -71,14 +74,15 @@ final class Assembly {
                 tray);
         draft.version().addListener((version, before, after) -> mapView.repaint());
         draft.tool().addListener((tool, before, after) -> mapView.repaint());
-        Folio folio = new Folio(session, outside.tasks(), outside.copies(), outside.dialogs(), shell.theme());
+        this.running = new RunningModel(outside.tasks()::running);
+        this.folio = new Folio(session, outside.tasks(), outside.copies(), outside.dialogs(), shell.theme());
         Slots slots = new Slots(
                 new WelcomeView(welcome),
                 new ShowingBar(map),
                 mapView,
                 Optional.of(folio.pages()),
                 Optional.of(folio.ribbon()));
-        this.view = new ShellView(shell, slots, actions);
+        this.view = new ShellView(shell, slots, actions, running);
         actions.add(actionsOfWindow());
         actions.add(mapView.actions());
         actions.add(new DraftActions(draft, hand, files, tray, mapView::repaint).all(map));
@@ -98,16 +102,26 @@ final class Assembly {
                 new Action(window, "action.theme", "F9", shell::switchTheme),
                 new Action(window, "action.pane", "F6", view::nextPane),
                 new Action(window, "action.caution", "Shift+F1", view::showCaution),
+                new Action(window, "action.notices", "F7", view::showNotices),
+                new Action(window, "action.running", "F10", view::showRunning),
+                new Action(window, "action.stop", "Shift+Esc", running::canStop, running::stop),
+                new Action(window, "action.again", "Shortcut+R", this::again),
                 new Action(time, "action.later", "Period", () -> shell.move(1)),
                 new Action(time, "action.earlier", "Comma", () -> shell.move(-1)),
                 new Action(time, "action.deeper", "Page Down", () -> shell.sink(1)),
                 new Action(time, "action.higher", "Page Up", () -> shell.sink(-1)));
     }
 
+    private void again() {
+        folio.again();
+        map.values().again();
+    }
+
     private void show(Opening opening) {
         Optional<OpenSet> before = session.set().get();
         session.show(Optional.of(opening.set()));
-        session.status().set(opened(opening.set().aquifer()));
+        opening.set().workbench().warnings().forEach(session.notices()::warn);
+        session.notices().done(opened(opening.set().aquifer()));
         files.begin(opening);
         mapView.focus();
         before.ifPresent(this::putAway);
@@ -115,7 +129,7 @@ final class Assembly {
 
     private void putAway(OpenSet set) {
         outside.tasks()
-                .each("closing", 1)
+                .each("task.closing", 1)
                 .run(
                         progress -> {
                             set.close();

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.OptionalDouble;
+import java.util.stream.IntStream;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.Solute;
 import org.seepledger.aquifer.Times;
@@ -31,6 +32,7 @@ import org.seepledger.plume.SoluteBalance;
 import org.seepledger.plume.TransectFlows;
 import org.seepledger.prism.Transect;
 import org.seepledger.progress.Progress;
+import org.seepledger.report.PlumeResult;
 import org.seepledger.report.PlumeSummary;
 import org.seepledger.unit.Measure;
 
@@ -44,6 +46,7 @@ public final class PlumeJob {
     private final MassUnits units;
     private final List<Period> periods;
     private final OptionalDouble above;
+    private final ReportFile report;
     private List<MeasuredPanels> measured = List.of();
     private List<Crossing> crossings = List.of();
 
@@ -58,6 +61,7 @@ public final class PlumeJob {
                 .map(threshold ->
                         OptionalDouble.of(threshold.kilograms(subject.aquifer().lengthUnit())))
                 .orElse(OptionalDouble.empty());
+        this.report = new ReportFile(request.report(), periods);
     }
 
     /**
@@ -119,11 +123,14 @@ public final class PlumeJob {
         subject.warnings().addAll(ofSolutes.warnings(plumes));
         subject.notes().addAll(ofWater.remarks(request.wells()));
         subject.notes().addAll(ofSolutes.remarks(solutes, plumes));
-        write(out, plumes, water);
+        int each = solutes.size();
+        List<PlumeResult> results = IntStream.range(0, plumes.size())
+                .mapToObj(i -> PlumeResult.of(aquifer, plumes.get(i), periods, records.get(i / each), above))
+                .toList();
+        write(out, results, water);
         List<String> files = out.written();
         out.publish();
-        String summary =
-                new PlumeSummary(aquifer, records, periods, units).of(plumes, subject.warnings(), subject.notes());
+        String summary = PlumeSummary.of(aquifer, results, units, subject.warnings(), subject.notes());
         return new PlumeOutcome(summary, worst(plumes), files);
     }
 
@@ -161,7 +168,8 @@ public final class PlumeJob {
                 .orElse(List.of());
     }
 
-    private void write(OutputFolder out, List<Plume> plumes, Balance water) {
+    private void write(OutputFolder out, List<PlumeResult> results, Balance water) {
+        List<Plume> plumes = results.stream().map(PlumeResult::plume).toList();
         Aquifer aquifer = subject.aquifer();
         Times times = aquifer.times();
         Statement statement = subject.statement("Solute budget of \"" + aquifer.name() + "\"", progress);
@@ -174,6 +182,8 @@ public final class PlumeJob {
                 TransectCsv.write(
                         out.file("transect.csv"), statement, crossings, measured, periods, times, units, length);
             }
+            Map<String, String> ofResult = optionsOfResult();
+            report.write(out, subject, results, crossings, measured, units, statement, ofResult);
             RunRecord.write(out, "plume", options(), statement, subject.notes(), RunRecord.checks(water), stopwatch);
         } catch (IOException e) {
             throw new UsageFault("The results cannot be written beside " + request.out() + " (" + Unreadable.reason(e)
@@ -182,6 +192,14 @@ public final class PlumeJob {
     }
 
     private Map<String, String> options() {
+        Map<String, String> options = optionsOfResult();
+        options.putAll(report.options());
+        options.put("threads", String.valueOf(request.threads()));
+        return options;
+    }
+
+    /** The options that results depend on. */
+    private Map<String, String> optionsOfResult() {
         Map<String, String> options = RunRecord.options(request.aquifer(), request.prisms());
         RunRecord.addPeriods(options, request.every(), request.periods(), request.waterYearStart());
         options.put("rate-unit", units.rate().toString());
@@ -193,7 +211,6 @@ public final class PlumeJob {
         request.transects().ifPresent(file -> options.put("transects", file.toString()));
         request.panels().ifPresent(file -> options.put("panels", file.toString()));
         options.put("clip", String.valueOf(request.clip()));
-        options.put("threads", String.valueOf(request.threads()));
         return options;
     }
 

@@ -27,6 +27,7 @@ import org.seepledger.unit.Measure;
  * @param clip whether prisms are cut at the grid's edge
  * @param threads how many threads may work
  * @param overwrite whether an earlier run's files may be replaced
+ * @param report what the report is to look like
  */
 public record PlumeRequest(
         Path aquifer,
@@ -45,7 +46,8 @@ public record PlumeRequest(
         Optional<Path> panels,
         boolean clip,
         int threads,
-        boolean overwrite) {
+        boolean overwrite,
+        ReportRequest report) {
 
     /**
      * A concentration with its unit.

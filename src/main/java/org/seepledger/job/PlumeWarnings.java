@@ -64,15 +64,11 @@ final class PlumeWarnings {
         int worst = 0;
         long detects = 0;
         long nonDetects = 0;
-        double least = Double.POSITIVE_INFINITY;
-        double greatest = 0;
         for (int instant = 0; instant < plume.stocks().size(); instant++) {
             Stock stock = plume.whole(instant);
             worst = stock.undetectedShare() > plume.whole(worst).undetectedShare() ? instant : worst;
             detects += stock.detects();
             nonDetects += stock.nonDetects();
-            least = Math.min(least, stock.leastLimit());
-            greatest = Math.max(greatest, stock.greatestLimit());
         }
         Stock stock = plume.whole(worst);
         if (detects == 0 && nonDetects > 0) {
@@ -86,8 +82,9 @@ final class PlumeWarnings {
                     + aquifer.timeUnit() + "; it is from " + Figures.shown(stock.total(NonDetects.ZERO)) + " to "
                     + Figures.shown(stock.total(NonDetects.LIMIT)) + " kg: a bracket, not an estimate.");
         }
-        if (greatest > least * (1 + 1e-9)) {
-            warnings.add(name(plume) + ": detection limits differ (the greatest is " + Figures.shown(greatest / least)
+        double ratio = plume.limitsRatio();
+        if (ratio > 1 + 1e-9) {
+            warnings.add(name(plume) + ": detection limits differ (the greatest is " + Figures.shown(ratio)
                     + " times the least); a trend may be the limits' alone.");
         }
     }

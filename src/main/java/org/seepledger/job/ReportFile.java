@@ -2,7 +2,6 @@ package org.seepledger.job;
 
 import java.io.IOException;
 import java.nio.file.Files;
-import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -12,16 +11,23 @@ import java.util.Set;
 import java.util.stream.IntStream;
 import org.seepledger.balance.Balance;
 import org.seepledger.fault.UsageFault;
+import org.seepledger.io.result.MassUnits;
 import org.seepledger.io.result.PrismBudget;
 import org.seepledger.io.result.ResultUnits;
 import org.seepledger.io.result.Statement;
+import org.seepledger.io.table.MeasuredPanels;
 import org.seepledger.ledger.Period;
+import org.seepledger.plume.Crossing;
+import org.seepledger.report.PlumeResult;
 import org.seepledger.report.PrismResult;
+import org.seepledger.report.page.Cover;
 import org.seepledger.report.page.Masthead;
+import org.seepledger.report.page.PlumeDrawing;
 import org.seepledger.report.page.PrismPictures;
 import org.seepledger.report.page.Report;
 import org.seepledger.report.page.ReportPage;
 import org.seepledger.report.page.ReportPictures;
+import org.seepledger.report.page.SoluteReport;
 import org.seepledger.report.page.TableChoice;
 
 /** Puts a report together and writes it. */
@@ -53,7 +59,9 @@ final class ReportFile {
         for (String name : names) {
             if (!periods.contains(name)) {
                 throw new UsageFault("--report-periods is \"" + name + "\"; give record, worst, all, or the name of a"
-                        + " period as in budget.csv, such as \"" + periods.get(0) + "\".");
+                        + " period as in budget.csv, from \"" + periods.get(0) + "\" to \""
+                        + periods.get(periods.size() - 1)
+                        + "\".");
             }
         }
         return new TableChoice(record, worst, all, names);
@@ -74,7 +82,7 @@ final class ReportFile {
         return options;
     }
 
-    /** Writes the report. */
+    /** Writes the report on a water budget. */
     void write(
             OutputFolder out,
             Subject subject,
@@ -92,27 +100,53 @@ final class ReportFile {
                 .mapToObj(prism -> drawing.of(prism, results.get(prism)))
                 .toList();
         Report report = new Report(
-                masthead(subject),
-                Version.text(),
-                subject.aquifer(),
-                subject.crs(),
+                cover("Water budget", subject, statement, options),
                 results,
                 balance.exchange(),
                 units,
                 request.amounts(),
                 tables,
-                statement,
-                subject.notes(),
-                options,
                 pictures,
                 drawing.exchange(results.get(0).record().period()));
-        Path file = out.file(NAME);
-        Files.writeString(file, ReportPage.of(report));
+        Files.writeString(out.file(NAME), ReportPage.of(report));
     }
 
-    private Masthead masthead(Subject subject) {
-        String title = request.title()
-                .orElse("Water budget of \u201c" + subject.aquifer().name() + "\u201d");
-        return new Masthead(title, request.author(), request.reference(), request.letterhead(), request.date());
+    /** Writes the report on solutes. */
+    void write(
+            OutputFolder out,
+            Subject subject,
+            List<PlumeResult> results,
+            List<Crossing> crossings,
+            List<MeasuredPanels> measured,
+            MassUnits units,
+            Statement statement,
+            Map<String, String> options)
+            throws IOException {
+        PlumeDrawing drawing = new PlumeDrawing(subject.aquifer(), subject.prisms(), units);
+        SoluteReport report = new SoluteReport(
+                cover("Solute budget", subject, statement, options),
+                results,
+                units,
+                request.amounts(),
+                tables,
+                results.stream().map(drawing::of).toList(),
+                crossings.stream()
+                        .map(crossing -> drawing.of(crossing, results.get(0)))
+                        .toList(),
+                measured);
+        Files.writeString(out.file(NAME), ReportPage.of(report));
+    }
+
+    private Cover cover(String budget, Subject subject, Statement statement, Map<String, String> options) {
+        String title =
+                request.title().orElse(budget + " of \u201c" + subject.aquifer().name() + "\u201d");
+        return new Cover(
+                new Masthead(title, request.author(), request.reference(), request.letterhead(), request.date()),
+                Version.text(),
+                subject.aquifer(),
+                subject.crs(),
+                statement,
+                subject.notes(),
+                options);
     }
 }

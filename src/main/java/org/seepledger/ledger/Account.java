@@ -8,4 +8,14 @@ package org.seepledger.ledger;
  * @param layer the layer, from 0
  * @param quantified whether its numbers can be given
  */
-public record Account(Group group, String item, int layer, boolean quantified) {}
+public record Account(Group group, String item, int layer, boolean quantified) {
+
+    /** {@return what its item is called in a sentence} */
+    public String name() {
+        return switch (group) {
+            case LID -> item + " lid";
+            case DISPERSION -> "dispersion, " + item;
+            default -> item;
+        };
+    }
+}

@@ -130,6 +130,67 @@ public final class MapPicture {
     }
 
     /**
+     * A plume on a map.
+     *
+     * @param outline what lies above a threshold; empty where none was asked for
+     * @param threshold the threshold as it is written
+     * @param track the way of its centre of mass
+     */
+    public record Trail(Optional<ThresholdOutline> outline, String threshold, PlumeTrack track) {}
+
+    /**
+     * {@return a map of a plume with the net flow of the solute through each lateral face as an arrow}
+     *
+     * @param aquifer the aquifer, whose wells are shown
+     * @param subject the prism
+     * @param others the other prisms
+     * @param ground the concentrations that lie under it
+     * @param trail what else is shown of the plume
+     * @param line the line of the section, if there is one
+     * @param budget the prism's budget of the solute over the record
+     * @param unit the unit to show
+     * @param title what it shows
+     * @param width in logical pixels
+     */
+    public static Picture ofPlume(
+            Aquifer aquifer,
+            Prism subject,
+            List<Prism> others,
+            Ground ground,
+            Trail trail,
+            Optional<SectionLine> line,
+            PeriodBudget budget,
+            UnitShown unit,
+            String title,
+            double width) {
+        MapPicture map = new MapPicture(aquifer, subject, others, Optional.of(ground), width);
+        MapFrame frame = map.sheet.frame();
+        trail.outline().ifPresent(outline -> outline.marks(frame).forEach(map.sheet::onGround));
+        line.ifPresent(map::drawLine);
+        new FaceArrows(subject, budget, unit).draw(map.sheet);
+        trail.track().marks(frame, map.sheet.labels()).forEach(map.sheet::above);
+        aquifer.placedWells().forEach(map.sheet::well);
+        others.forEach(map.sheet::name);
+        Picture drawn = map.picture(
+                Optional.of(ground),
+                title,
+                "Concentrations as colours; arrows across the faces point inward where the solute comes in and outward"
+                        + " where it leaves, in proportion to net flow in " + unit.words()
+                        + "; the dark line is the way of the centre of mass.");
+        return withKey(drawn, trail);
+    }
+
+    private static Picture withKey(Picture drawn, Trail trail) {
+        List<Mark> marks = new ArrayList<>(drawn.marks());
+        Key key = new Key(MapSheet.MARGIN, drawn.width() - RIGHT, drawn.height(), marks);
+        if (trail.outline().isPresent()) {
+            key.line(ThresholdOutline.stroke(), "cells with more than " + trail.threshold());
+        }
+        key.line(PlumeTrack.stroke(), "way of the centre of mass, the last with one standard deviation round it");
+        return new Picture(drawn.width(), key.end() + 4, drawn.title(), drawn.description(), marks);
+    }
+
+    /**
      * {@return a map of what cells gain that nothing accounts for}
      *
      * @param aquifer the aquifer

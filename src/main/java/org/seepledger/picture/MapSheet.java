@@ -52,6 +52,11 @@ final class MapSheet {
         above.add(mark);
     }
 
+    /** Adds a mark that lies on the ground, above what already does. */
+    void onGround(Mark mark) {
+        ground.add(mark);
+    }
+
     void drape(Drape drape, ValueScale scale, double opacity) {
         ground.add(drape.image(frame, scale, opacity));
     }

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import org.seepledger.aquifer.Aquifer;
+import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.PlacedWell;
 import org.seepledger.aquifer.Screen;
 import org.seepledger.ledger.Group;
@@ -25,6 +26,11 @@ public final class SectionPicture {
     private static final double LEFT = 48;
     private static final double RIGHT = 116;
     private static final double KEY = 56;
+    private static final double LEGEND = 360;
+
+    /** Neighbouring colours overlap by this, lest the paper shine through between them. */
+    private static final double SEAM = 0.4;
+
     private static final double SMALL = SectionSheet.SMALL;
     private static final Stroke AT_START = Stroke.of(Ink.Token.WATER, 1.3).dashed(5.0, 3.0);
     private static final Stroke AT_END = Stroke.of(Ink.Token.WATER, 2);
@@ -41,9 +47,33 @@ public final class SectionPicture {
     private final Profile profile;
     private final SectionSheet sheet;
 
-    private SectionPicture(Aquifer aquifer, SectionLine line, Profile profile, double width) {
+    private final Optional<Shade> shade;
+
+    /** A value of each cell. */
+    public interface CellValues {
+        /**
+         * {@return the value; not finite where there is none}
+         *
+         * @param layer from 0
+         * @param row from 0 in the north
+         * @param column from 0
+         */
+        double at(int layer, int row, int column);
+    }
+
+    /**
+     * What cells are coloured by.
+     *
+     * @param values a value of each cell
+     * @param scale which colour a value has
+     * @param words what the values are, with their unit
+     */
+    public record Shade(CellValues values, ValueScale scale, String words) {}
+
+    private SectionPicture(Aquifer aquifer, SectionLine line, Profile profile, Optional<Shade> shade, double width) {
         this.aquifer = aquifer;
         this.line = line;
+        this.shade = shade;
         this.length = line.length() * aquifer.grid().planUnit();
         this.profile = profile;
         this.sheet = new SectionSheet(profile, new Box(LEFT, TOP, width - LEFT - RIGHT, HEIGHT - TOP - KEY));
@@ -61,20 +91,43 @@ public final class SectionPicture {
      */
     public static Optional<Picture> of(
             Aquifer aquifer, Prism prism, SectionLine line, PeriodBudget budget, UnitShown unit, double width) {
+        return of(aquifer, prism, line, budget, unit, Optional.empty(), width);
+    }
+
+    /**
+     * {@return the section with cells coloured by a value; none where the line meets no layer}
+     *
+     * @param aquifer the aquifer
+     * @param prism the prism
+     * @param line the line
+     * @param budget the prism's budget over the record
+     * @param unit the unit to show
+     * @param shade what cells are coloured by, if by anything
+     * @param width in logical pixels
+     */
+    public static Optional<Picture> of(
+            Aquifer aquifer,
+            Prism prism,
+            SectionLine line,
+            PeriodBudget budget,
+            UnitShown unit,
+            Optional<Shade> shade,
+            double width) {
         Profile profile = Profile.along(line, aquifer, prism);
         return SectionSheet.elevations(profile).findAny().isEmpty()
                 ? Optional.empty()
-                : Optional.of(new SectionPicture(aquifer, line, profile, width).draw(prism, budget, unit));
+                : Optional.of(new SectionPicture(aquifer, line, profile, shade, width).draw(prism, budget, unit));
     }
 
     private Picture draw(Prism prism, PeriodBudget budget, UnitShown unit) {
+        shade.ifPresent(this::colour);
         drawLayers();
         sheet.level(stretch -> stretch.column().levelAtStart(), AT_START);
         sheet.level(stretch -> stretch.column().levelAtEnd(), AT_END);
         sheet.bodies(
                 Stretch::top,
                 Stretch::bottom,
-                new Fill(Ink.Token.PRISM, 0.14, Mark.Texture.PLAIN),
+                new Fill(Ink.Token.PRISM, shade.isPresent() ? 0 : 0.14, Mark.Texture.PLAIN),
                 Stroke.of(Ink.Token.PRISM, 2));
         aquifer.placedWells().forEach(this::drawWell);
         drawLid(budget, "top", unit);
@@ -84,8 +137,14 @@ public final class SectionPicture {
         marks.add(Mark.Text.of(box.x(), 14, "A", 13, Mark.Anchor.MIDDLE).strong());
         marks.add(Mark.Text.of(box.right(), 14, "A′", 13, Mark.Anchor.MIDDLE).strong());
         drawKey(marks, unit.words());
+        Box legend = new Box(box.x(), HEIGHT + 4, Math.min(LEGEND, box.width()), RampLegend.LEVEL_HEIGHT);
+        shade.ifPresent(by -> marks.addAll(RampLegend.level(by.scale(), 1, by.words(), legend)));
         return new Picture(
-                box.right() + RIGHT, HEIGHT, "Vertical section through " + prism.name(), description(), marks);
+                box.right() + RIGHT,
+                shade.isPresent() ? legend.bottom() + 4 : HEIGHT,
+                "Vertical section through " + prism.name(),
+                description(),
+                marks);
     }
 
     private String description() {
@@ -94,13 +153,42 @@ public final class SectionPicture {
                 + " times exaggerated, and the net flow through top and bottom.";
     }
 
+    /** Colours each cell that the line cuts, from its bottom to the lower one of its top and the water level. */
+    private void colour(Shade by) {
+        Grid grid = aquifer.grid();
+        for (Stretch stretch : profile.stretches()) {
+            double share = (stretch.from() + stretch.to()) / 2;
+            double x = line.x(share);
+            double y = line.y(share);
+            int row = grid.flipped(grid.y().nearest(grid.localY(x, y)));
+            int column = grid.x().nearest(grid.localX(x, y));
+            double[] surfaces = stretch.column().surfaces();
+            for (int layer = 0; layer + 1 < surfaces.length; layer++) {
+                double value = by.values().at(layer, row, column);
+                double level = aquifer.layers().get(layer).waterTable()
+                        ? stretch.column().levelAtEnd()
+                        : Double.NaN;
+                double upper = Double.isFinite(level) ? Math.min(surfaces[layer], level) : surfaces[layer];
+                if (Double.isFinite(value) && upper > surfaces[layer + 1]) {
+                    Box cell = new Box(
+                            sheet.x(stretch.from()),
+                            sheet.y(upper),
+                            sheet.x(stretch.to()) - sheet.x(stretch.from()) + SEAM,
+                            sheet.y(surfaces[layer + 1]) - sheet.y(upper));
+                    Ink ink = by.scale().ramp().ink(by.scale().share(value));
+                    sheet.inside(Mark.Area.of(cell, Fill.of(ink)));
+                }
+            }
+        }
+    }
+
     private void drawLayers() {
         for (int k = 0; k < aquifer.layers().size(); k++) {
             int layer = k;
             sheet.bodies(
                     stretch -> stretch.column().surfaces()[layer],
                     stretch -> stretch.column().surfaces()[layer + 1],
-                    new Fill(Ink.Token.TEXT, k % 2 == 0 ? 0.05 : 0.13, Mark.Texture.PLAIN),
+                    new Fill(Ink.Token.TEXT, shade.isPresent() ? 0 : k % 2 == 0 ? 0.05 : 0.13, Mark.Texture.PLAIN),
                     Stroke.of(Ink.Token.MUTED, 0.6));
             nameLayer(layer);
         }

@@ -5,7 +5,6 @@ import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import org.seepledger.ledger.Account;
 import org.seepledger.ledger.Entry;
 import org.seepledger.ledger.Group;
 import org.seepledger.ledger.PeriodBudget;
@@ -23,7 +22,7 @@ record Slices(List<Slice> gains, List<Slice> losses, List<String> unknown) {
         Map<String, double[]> items = new LinkedHashMap<>();
         for (Entry entry : budget.entries()) {
             if (entry.account().group() != Group.STORAGE) {
-                add(items.computeIfAbsent(name(entry.account()), name -> new double[4]), entry);
+                add(items.computeIfAbsent(entry.account().name(), name -> new double[4]), entry);
             }
         }
         List<Slice> gains = new ArrayList<>();
@@ -60,10 +59,6 @@ record Slices(List<Slice> gains, List<Slice> losses, List<String> unknown) {
         if (amount > 0 && Double.isFinite(amount)) {
             slices.add(new Slice(name, amount));
         }
-    }
-
-    private static String name(Account account) {
-        return account.group() == Group.LID ? account.item() + " lid" : account.item();
     }
 
     static double sum(List<Slice> slices) {

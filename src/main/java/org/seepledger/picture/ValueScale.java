@@ -37,6 +37,16 @@ public record ValueScale(Ramp ramp, double from, double to) {
         return new ValueScale(Ramp.DEPTH, least - room, greatest + room);
     }
 
+    /**
+     * {@return a scale of concentrations, from 0 to the greatest of some values}
+     *
+     * @param values the values; those that are not finite do not count
+     */
+    public static ValueScale ofConcentrations(double[] values) {
+        double greatest = finite(values).max().orElse(0);
+        return new ValueScale(Ramp.STAIN, 0, greatest > 0 ? greatest : 1);
+    }
+
     /** {@return whether values are all the same but for rounding, so that lines between them would mean nothing} */
     static boolean isFlat(double[] values) {
         DoubleSummaryStatistics known = finite(values).summaryStatistics();

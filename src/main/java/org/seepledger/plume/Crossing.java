@@ -1,7 +1,10 @@
 package org.seepledger.plume;
 
 import java.util.Arrays;
+import java.util.Comparator;
+import java.util.List;
 import java.util.stream.IntStream;
+import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.Solute;
 import org.seepledger.balance.Span;
 import org.seepledger.ledger.Period;
@@ -74,5 +77,64 @@ public record Crossing(
             }
         }
         return new Panels(area, flow, rate);
+    }
+
+    /**
+     * A piece on the line's way.
+     *
+     * @param piece from 0
+     * @param from how far along the line it begins, length
+     * @param to how far along it ends
+     */
+    public record Stretch(int piece, double from, double to) {}
+
+    /**
+     * {@return the pieces in their order along the line}
+     *
+     * @param grid the grid
+     */
+    public List<Stretch> along(Grid grid) {
+        double[] begins = new double[transect.segments()];
+        for (int segment = 1; segment < begins.length; segment++) {
+            double[] from = transect.vertices().get(segment - 1);
+            double[] to = transect.vertices().get(segment);
+            begins[segment] = begins[segment - 1] + Math.hypot(to[0] - from[0], to[1] - from[1]) * grid.planUnit();
+        }
+        return IntStream.range(0, pieces.count())
+                .mapToObj(piece -> stretch(piece, begins[pieces.side(piece)], grid))
+                .sorted(Comparator.comparingDouble(Stretch::from))
+                .toList();
+    }
+
+    private Stretch stretch(int piece, double begin, Grid grid) {
+        int row = pieces.row(piece);
+        int column = pieces.column(piece);
+        double[] start = transect.vertices().get(pieces.side(piece));
+        double x = grid.x().edge(column) + pieces.middleAcross(piece) * grid.x().size(column);
+        double y = grid.y().edge(grid.flipped(row))
+                + pieces.middleUp(piece) * grid.y().size(grid.flipped(row));
+        double away = Math.hypot(x - grid.localX(start[0], start[1]), y - grid.localY(start[0], start[1]));
+        double length = Math.hypot(pieces.across(piece) * grid.width(column), pieces.up(piece) * grid.height(row));
+        double middle = begin + away * grid.planUnit();
+        return new Stretch(piece, middle - length / 2, middle + length / 2);
+    }
+
+    /**
+     * {@return the mass that crosses a piece in a period, the mean over it, kg/time, positive forward}
+     *
+     * @param period the period
+     * @param piece from 0
+     * @param layer a layer, from 0; -1 for all
+     */
+    public double rate(Period period, int piece, int layer) {
+        double rate = 0;
+        for (Period.Part part : period.parts()) {
+            double[] panels = rates[part.interval()][NonDetects.HALF.ordinal()];
+            double share = part.duration() / period.duration();
+            for (int k = Math.max(layer, 0); k < (layer < 0 ? layers : layer + 1); k++) {
+                rate += share * panels[piece * layers + k];
+            }
+        }
+        return rate;
     }
 }

@@ -14,18 +14,23 @@ import java.util.stream.IntStream;
  */
 public record Panels(double[] areas, double[] flows, double[] rates) {
 
-    /**
-     * {@return one of the parts}
-     *
-     * @param part which, from 0
-     */
-    public Panels only(int part) {
-        return new Panels(new double[] {areas[part]}, new double[] {flows[part]}, new double[] {rates[part]});
-    }
-
     /** {@return the area of all} */
     public double area() {
         return Arrays.stream(areas).sum();
+    }
+
+    /** {@return the net flow of water} */
+    public double flow() {
+        return Arrays.stream(flows).sum();
+    }
+
+    /**
+     * {@return one of them alone}
+     *
+     * @param panel which, from 0
+     */
+    public Panels only(int panel) {
+        return new Panels(new double[] {areas[panel]}, new double[] {flows[panel]}, new double[] {rates[panel]});
     }
 
     /** {@return the net mass discharge} */

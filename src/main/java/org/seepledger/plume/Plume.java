@@ -66,4 +66,15 @@ public record Plume(
         List<Stock> layers = stocks.get(instant);
         return layers.get(layers.size() - 1);
     }
+
+    /** {@return how many times the least limit of a non-detect the greatest is, over all instants; 1 where there are none} */
+    public double limitsRatio() {
+        double least = Double.POSITIVE_INFINITY;
+        double greatest = 0;
+        for (int instant = 0; instant < stocks.size(); instant++) {
+            least = Math.min(least, whole(instant).leastLimit());
+            greatest = Math.max(greatest, whole(instant).greatestLimit());
+        }
+        return greatest > least ? greatest / least : 1;
+    }
 }

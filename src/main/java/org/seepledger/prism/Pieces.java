@@ -121,12 +121,30 @@ public final class Pieces {
     }
 
     /**
+     * {@return where the middle of a piece is across its cell, from 0 in the west to 1}
+     *
+     * @param piece from 0
+     */
+    public double middleAcross(int piece) {
+        return 0.5 * (startAcross[piece] + endAcross[piece]);
+    }
+
+    /**
+     * {@return where the middle of a piece is up its cell, from 0 in the south to 1}
+     *
+     * @param piece from 0
+     */
+    public double middleUp(int piece) {
+        return 0.5 * (startUp[piece] + endUp[piece]);
+    }
+
+    /**
      * {@return the share of a piece's cell between the piece and the cell's west face}
      *
      * @param piece from 0
      */
     double shareToTheWest(int piece) {
-        return 0.5 * (startAcross[piece] + endAcross[piece]) * up(piece);
+        return middleAcross(piece) * up(piece);
     }
 
     /**

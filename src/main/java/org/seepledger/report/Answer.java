@@ -59,8 +59,8 @@ public record Answer(String prism, List<Point> points) {
      */
     public static Answer of(PrismResult result, StatedOrigins origins, Wording wording) {
         List<Point> points = new ArrayList<>();
-        add(points, Topic.CLOSURE, new ClosureWords(result, wording).sentences());
-        add(points, Topic.DOMINANT, new DominanceWords(result, wording).sentences());
+        add(points, Topic.CLOSURE, new ClosureWords(result.budget(), wording).sentences());
+        add(points, Topic.DOMINANT, new DominanceWords(result.budget(), wording).sentences());
         add(points, Topic.STORAGE, new StorageWords(result, wording).sentences());
         add(points, Topic.EXCHANGE, new ExchangeWords(result, wording).sentences());
         add(points, Topic.LIMITS, new LimitWords(result, origins, wording).sentences());

@@ -14,8 +14,6 @@ import org.seepledger.unit.Figures;
  * whether it closes, what dominates, and where it does not. */
 public final class BalanceSummary {
 
-    private static final int TERMS_SHOWN = 6;
-
     private final Aquifer aquifer;
     private final Balance balance;
     private final List<PrismBudget> budgets;
@@ -79,36 +77,13 @@ public final class BalanceSummary {
     private void writePrism(int prism) {
         PrismResult result = PrismResult.of(aquifer, balance, budgets, prism);
         text.append('\n').append(result.prism()).append('\n');
-        new ClosureWords(result, Wording.plain(units))
+        new ClosureWords(result.budget(), Wording.plain(units))
                 .inShort()
                 .forEach(sentence -> text.append("  ").append(sentence).append('\n'));
-        writeTerms(result);
+        LargestTerms.append(text, result.budget(), units);
         if (result.isWorthLocating()) {
             writeWhereabouts(result.whereabouts(), result.record());
         }
-    }
-
-    private void writeTerms(PrismResult result) {
-        List<Term> sorted = Term.bySize(result.terms());
-        double throughput = result.record().totals().throughput();
-        TextTable table = new TextTable().row("", "in", "out", "net", "of throughput");
-        for (Term term : sorted.subList(0, Math.min(TERMS_SHOWN, sorted.size()))) {
-            String share = Figures.percent(throughput == 0 ? Double.NaN : 100 * Math.abs(term.net()) / throughput);
-            addRow(table, term.name(), term.inflow(), term.outflow(), result.record(), share);
-        }
-        if (sorted.size() > TERMS_SHOWN) {
-            List<Term> rest = sorted.subList(TERMS_SHOWN, sorted.size());
-            double inflow = rest.stream().mapToDouble(Term::inflow).sum();
-            double outflow = rest.stream().mapToDouble(Term::outflow).sum();
-            addRow(table, Wording.counted(rest.size(), "smaller term"), inflow, outflow, result.record(), "");
-        }
-        text.append("  Largest terms in ").append(units.rate()).append(":\n");
-        table.appendTo(text, "    ");
-    }
-
-    private void addRow(
-            TextTable table, String name, double inflow, double outflow, PeriodBudget record, String share) {
-        table.row(name, rate(inflow, record), rate(outflow, record), rate(inflow - outflow, record), share);
     }
 
     private void writeWhereabouts(Whereabouts where, PeriodBudget record) {
@@ -120,11 +95,5 @@ public final class BalanceSummary {
         double throughput = record.totals().throughput() / record.period().duration();
         String unit = units.rate().toString();
         HotSpots.append(text, aquifer.grid(), where.largest(), unit, units.rateFactor(), throughput);
-    }
-
-    /** A rate over the record; rounding of the terms that make the throughput counts as 0. */
-    private String rate(double volume, PeriodBudget record) {
-        double factor = units.rateFactor() / record.period().duration();
-        return Figures.shown(volume * factor, record.totals().throughput() * factor);
     }
 }

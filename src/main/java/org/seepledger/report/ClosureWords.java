@@ -10,22 +10,22 @@ final class ClosureWords {
     /** From this share of throughput on, gross flow that is no net flow is worth a sentence. */
     private static final double THROUGH_FLOW = 0.1;
 
-    private final PrismResult result;
+    private final BudgetCourse budget;
     private final Wording wording;
     private final Totals totals;
     private final double time;
 
-    ClosureWords(PrismResult result, Wording wording) {
-        this.result = result;
+    ClosureWords(BudgetCourse budget, Wording wording) {
+        this.budget = budget;
         this.wording = wording;
-        this.totals = result.record().totals();
-        this.time = result.record().period().duration();
+        this.totals = budget.record().totals();
+        this.time = budget.record().period().duration();
     }
 
     List<String> sentences() {
         List<String> sentences = new ArrayList<>();
         sentences.addAll(inShort());
-        if (result.storageKnown() && totals.throughput() > 0) {
+        if (budget.storageKnown() && totals.throughput() > 0) {
             addThroughFlow(sentences);
         }
         return sentences;
@@ -35,7 +35,7 @@ final class ClosureWords {
     List<String> inShort() {
         List<String> sentences = new ArrayList<>();
         sentences.add(overTheRecord());
-        result.worstPeriod()
+        budget.worstPeriod()
                 .map(worst -> "Worst period: " + worst.period().name() + ", "
                         + error(worst.totals().closureError()) + ".")
                 .ifPresent(sentences::add);
@@ -43,7 +43,7 @@ final class ClosureWords {
     }
 
     private String overTheRecord() {
-        if (!result.storageKnown()) {
+        if (!budget.storageKnown()) {
             return "Closure cannot be judged: change in storage is not known. Inflow less outflow, storage included, is "
                     + wording.rate(totals.inflow() - totals.outflow(), time) + ".";
         }
@@ -51,7 +51,7 @@ final class ClosureWords {
             return "Nothing flows: there is nothing to close.";
         }
         String throughput = wording.rate(totals.throughput(), time);
-        if (result.closesToRounding()) {
+        if (budget.closesToRounding()) {
             return "Closes to rounding: " + error(totals.closureError()) + " of a throughput of " + throughput
                     + " is unexplained.";
         }
@@ -62,7 +62,7 @@ final class ClosureWords {
 
     /** A closure error, or that it is no more than rounding. */
     private String error(double percent) {
-        double rounding = PrismResult.ROUNDING_PERCENT;
+        double rounding = BudgetCourse.ROUNDING_PERCENT;
         return Math.abs(percent) < rounding ? "less than " + wording.percent(rounding) : wording.percent(percent);
     }
 

@@ -11,11 +11,11 @@ final class DominanceWords {
 
     private static final int NAMED = 3;
 
-    private final PrismResult result;
+    private final BudgetCourse budget;
     private final Wording wording;
 
-    DominanceWords(PrismResult result, Wording wording) {
-        this.result = result;
+    DominanceWords(BudgetCourse budget, Wording wording) {
+        this.budget = budget;
         this.wording = wording;
     }
 
@@ -27,12 +27,12 @@ final class DominanceWords {
     }
 
     private void add(List<String> sentences, String what, String storage, ToDoubleFunction<Term> volume) {
-        List<Term> terms = result.terms().stream()
+        List<Term> terms = budget.terms().stream()
                 .filter(term -> term.quantified() && volume.applyAsDouble(term) > 0)
                 .sorted(Comparator.comparingDouble(term -> -volume.applyAsDouble(term)))
                 .toList();
         double all = terms.stream().mapToDouble(volume).sum();
-        double time = result.record().period().duration();
+        double time = budget.record().period().duration();
         if (terms.isEmpty()) {
             sentences.add("There are no " + what + ".");
             return;
@@ -57,7 +57,7 @@ final class DominanceWords {
         return faces.size() <= NAMED
                 ? ""
                 : " All " + faces.size() + " faces together have "
-                        + wording.rate(sum, result.record().period().duration()) + " ("
+                        + wording.rate(sum, budget.record().period().duration()) + " ("
                         + wording.percent(100 * sum / all) + ").";
     }
 }

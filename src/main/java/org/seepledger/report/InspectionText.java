@@ -54,6 +54,10 @@ public final class InspectionText {
         writeFrame();
         writeLayers();
         writeRanges();
+        PointsTable points = new PointsTable(aquifer);
+        if (!points.isEmpty()) {
+            points.appendTo(text, rateUnit);
+        }
         writeBalance();
         writeList("Warnings", warnings, "none");
         if (!notes.isEmpty()) {

@@ -23,7 +23,7 @@ final class LimitWords {
         this.result = result;
         this.origins = origins;
         this.wording = wording;
-        this.terms = result.terms();
+        this.terms = result.budget().terms();
         this.totals = result.record().totals();
         this.time = result.record().period().duration();
     }
@@ -40,7 +40,7 @@ final class LimitWords {
         addByDifference(sentences);
         if (result.storageKnown()) {
             sentences.add(
-                    result.closesToRounding()
+                    result.budget().closesToRounding()
                             ? "That it closes to rounding proves the arithmetic and that flow, sources and storage belong"
                                     + " together; it does not prove that any of them is right."
                             : "A small closure error would not prove that the terms are right, nor does a large one tell"
@@ -61,7 +61,7 @@ final class LimitWords {
 
     private void addBelowResidual(List<String> sentences) {
         double residual = Math.abs(totals.residual());
-        if (!result.storageKnown() || result.closesToRounding()) {
+        if (!result.storageKnown() || result.budget().closesToRounding()) {
             return;
         }
         List<String> names = Term.bySize(terms).stream()
@@ -116,7 +116,7 @@ final class LimitWords {
                         + " of throughput; a difference smaller than that tells nothing." + against(combined)
                         + (silent.isEmpty()
                                 ? ""
-                                : " Nothing is in it of " + Wording.listed(silent) + ", which state none in percent."));
+                                : " It leaves out what states none in percent: " + Wording.listed(silent) + "."));
     }
 
     /** Terms that rest on the same statement err together: how many sides are drawn must not matter. */
@@ -144,7 +144,7 @@ final class LimitWords {
     }
 
     private String against(double combined) {
-        if (!result.storageKnown() || result.closesToRounding()) {
+        if (!result.storageKnown() || result.budget().closesToRounding()) {
             return "";
         }
         return Math.abs(totals.residual()) > combined

@@ -1,8 +1,6 @@
 package org.seepledger.report;
 
-import java.util.Comparator;
 import java.util.List;
-import java.util.Optional;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.StorageKnowledge;
 import org.seepledger.balance.Balance;
@@ -30,9 +28,6 @@ public record PrismResult(
         List<PeriodBudget> periods,
         List<ExchangeFlow> exchange,
         Whereabouts whereabouts) {
-
-    /** Below this, in percent, a closure error is rounding and nothing else. */
-    static final double ROUNDING_PERCENT = 1e-9;
 
     /** Imbalances that add up to less than this share of throughput change no figure of the budget. */
     private static final double LOCATED = 1e-8;
@@ -74,33 +69,11 @@ public record PrismResult(
 
     /** {@return whether change in storage can be given, and with it a residual} */
     public boolean storageKnown() {
-        return !Double.isNaN(record.totals().storageChange());
+        return budget().storageKnown();
     }
 
-    /** {@return whether the residual over the record is rounding and nothing else; false where there is none} */
-    public boolean closesToRounding() {
-        return closesToRounding(record);
-    }
-
-    /** {@return whether the residual of a budget is rounding and nothing else; false where there is none} */
-    static boolean closesToRounding(PeriodBudget budget) {
-        return !Double.isNaN(budget.totals().storageChange())
-                && (budget.totals().throughput() == 0
-                        || Math.abs(budget.totals().closureError()) < ROUNDING_PERCENT);
-    }
-
-    /** {@return the period with the largest closure error, where there is more than one period} */
-    public Optional<PeriodBudget> worstPeriod() {
-        return periods.size() < 2
-                ? Optional.empty()
-                : periods.stream()
-                        .filter(budget -> !Double.isNaN(budget.totals().closureError()))
-                        .max(Comparator.comparingDouble(
-                                budget -> Math.abs(budget.totals().closureError())));
-    }
-
-    /** {@return the terms over the record, in the order of rows} */
-    public List<Term> terms() {
-        return Term.of(record);
+    /** {@return its budget over the record and by period} */
+    public BudgetCourse budget() {
+        return new BudgetCourse(record, periods);
     }
 }

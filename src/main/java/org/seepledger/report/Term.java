@@ -81,6 +81,6 @@ public record Term(Group group, String item, List<Entry> entries, double inflow,
 
     /** {@return what it is called in a sentence} */
     public String name() {
-        return group == Group.LID ? item + " lid" : item;
+        return entries.get(0).account().name();
     }
 }

@@ -46,20 +46,30 @@ public final class Wording {
     /**
      * {@return a mean rate with its unit}
      *
-     * @param volume length³
+     * @param volume length³; kilograms in a solute's budget
      * @param duration the time that it took, in time units
      */
     public String rate(double volume, double duration) {
-        return number.apply(volume / duration * units.rateFactor()) + space + unit(units.rate());
+        return quantity(volume / duration * units.rateFactor(), unit(units.rate()));
     }
 
     /**
      * {@return a volume with its unit}
      *
-     * @param volume length³
+     * @param volume length³; kilograms in a solute's budget
      */
     public String volume(double volume) {
-        return number.apply(volume * units.volumeFactor()) + space + unit(units.volume());
+        return quantity(volume * units.volumeFactor(), unit(units.volume()));
+    }
+
+    /**
+     * {@return a number with a unit}
+     *
+     * @param value the number
+     * @param unit the unit as it is written
+     */
+    public String quantity(double value, String unit) {
+        return number.apply(value) + space + unit;
     }
 
     /**

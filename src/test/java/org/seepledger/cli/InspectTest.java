@@ -49,6 +49,17 @@ class InspectTest {
     }
 
     @Test
+    void addsUpPointSourcesByCategory() {
+        assertThat(inspected(files().with("sources", "[{'category': 'pumping', 'kind': 'points', 'file': 'w.csv'}]")
+                        .file(
+                                "w.csv",
+                                "name,x,y,layer,from,to,rate\nP,5,5,1,0,20,-4\nQ,15,5,1,0,10,-2\nR,5,5,2,0,20,0\n")))
+                .containsPattern(
+                        "Point sources, mean rates over the record in m3/d\n +number +idle +least +greatest +all")
+                .containsPattern("pumping +3 +1 +-4 +0 +-5");
+    }
+
+    @Test
     void hasNoDoubtsAboutAPlainSet() {
         assertThat(warnings(files().with("flow/z", "1e-3"))).isEqualTo("  none");
     }

@@ -1,5 +1,9 @@
 package org.seepledger.cli;
 
+import static org.assertj.core.api.Assertions.assertThat;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.ObjectMapper;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
@@ -7,8 +11,11 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.StreamSupport;
+import nu.validator.client.EmbeddedValidator;
 import nu.validator.htmlparser.common.XmlViolationPolicy;
 import nu.validator.htmlparser.dom.HtmlDocumentBuilder;
+import org.seepledger.unit.Figures;
 import org.w3c.dom.Document;
 import org.w3c.dom.Element;
 import org.w3c.dom.Node;
@@ -83,5 +90,27 @@ record ReportHtml(Path file, Document page) {
     /** The text that a reader sees, blanks as one blank. */
     static String text(Node node) {
         return node.getTextContent().replaceAll("\\s+", " ").strip();
+    }
+
+    /** Checks that a cell holds the number of a CSV to the last bit, and shows it as it rounds. */
+    static void assertCell(Element cell, String csv, boolean percent) {
+        double value = csv.isEmpty() ? Double.NaN : Double.parseDouble(csv);
+        assertThat(number(cell)).isEqualTo(value);
+        assertThat(cell.getTextContent()).isEqualTo(percent ? Figures.typesetPercent(value) : Figures.tabular(value));
+    }
+
+    /** What a validator of the HTML standard has against the page. */
+    List<String> faults() throws Exception {
+        EmbeddedValidator validator = new EmbeddedValidator();
+        validator.setOutputFormat(EmbeddedValidator.OutputFormat.JSON);
+        JsonNode messages =
+                new ObjectMapper().readTree(validator.validate(file)).get("messages");
+        return StreamSupport.stream(messages.spliterator(), false)
+                .filter(message -> !message.path("subType").asText().equals("warning")
+                        || message.path("message").asText().contains("heading"))
+                .map(message -> message.path("message").asText())
+                // The validator knows the CSS of 2020; browsers pass over what they do not know.
+                .filter(message -> !message.startsWith("CSS: "))
+                .toList();
     }
 }

@@ -18,6 +18,7 @@ import javafx.stage.Stage;
 import org.seepledger.desktop.map.Camera;
 import org.seepledger.desktop.port.GivenAnswers;
 import org.seepledger.desktop.task.BackgroundTasks;
+import org.seepledger.desktop.task.Tasks;
 import org.testfx.api.FxRobot;
 import org.testfx.api.FxToolkit;
 import org.testfx.util.WaitForAsyncUtils;
@@ -121,6 +122,11 @@ public final class OpenWindow implements AutoCloseable {
 
     Assembly assembly() {
         return assembly;
+    }
+
+    /** {@return where work is done} */
+    Tasks tasks() {
+        return tasks;
     }
 
     Stage stage() {

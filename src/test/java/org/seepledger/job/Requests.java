@@ -49,6 +49,7 @@ public final class Requests {
                 Optional.empty(),
                 true,
                 2,
-                false);
+                false,
+                ReportRequest.dated(LocalDate.of(2024, 5, 31)));
     }
 }

@@ -259,7 +259,7 @@ class AnswerTest {
         row(Group.SIDE, "side 1", 0, 50).row(Group.SOURCE, "leakage", 50, 0);
         assertThat(says(Topic.LIMITS))
                 .contains("Computed by difference, so that closure is no evidence for it: leakage.")
-                .anyMatch(sentence -> sentence.endsWith("Nothing is in it of side 1, which state none in percent."));
+                .anyMatch(sentence -> sentence.endsWith("It leaves out what states none in percent: side 1."));
     }
 
     @Test

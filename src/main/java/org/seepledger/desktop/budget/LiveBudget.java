@@ -51,8 +51,8 @@ public final class LiveBudget {
      */
     public LiveBudget(Session session, Tasks tasks) {
         this.session = session;
-        this.quick = tasks.latest("budget of the interval");
-        this.thorough = tasks.latest("budget of the record");
+        this.quick = tasks.latest("task.budget.interval");
+        this.thorough = tasks.latest("task.budget.record");
         known.addListener((last, before, after) -> whole.set(after.record()));
         session.set().addListener((set, before, after) -> begin());
         session.drawing().addListener((drawing, before, after) -> follow());
@@ -165,8 +165,8 @@ public final class LiveBudget {
                 || session.interval().get() != question.interval;
         if (changed) {
             follow();
-        } else if (!(fault instanceof Cancelled)) {
-            now.set(PaneState.failed(FaultWords.of(fault)));
+        } else {
+            now.set(PaneState.failed(why(fault)));
         }
     }
 
@@ -204,8 +204,16 @@ public final class LiveBudget {
     }
 
     private void notBalanced(Throwable fault) {
-        if (!(fault instanceof Cancelled)) {
-            record.set(PaneState.failed(FaultWords.of(fault)));
-        }
+        record.set(PaneState.failed(why(fault)));
+    }
+
+    private static String why(Throwable fault) {
+        return fault instanceof Cancelled ? Words.of("stopped.again") : FaultWords.of(fault);
+    }
+
+    /** Works out again what was stopped or failed. */
+    public void again() {
+        balanced = Optional.empty();
+        follow();
     }
 }

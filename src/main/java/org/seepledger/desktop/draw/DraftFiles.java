@@ -53,8 +53,8 @@ public final class DraftFiles {
         this.model = model;
         this.dialogs = dialogs;
         this.questions = questions;
-        this.keeping = tasks.latest("keeping the drawing");
-        this.files = tasks.latest("files of the drawing");
+        this.keeping = tasks.latest("task.keeping");
+        this.files = tasks.latest("task.files");
         model.version().addListener((version, before, after) -> keep());
     }
 
@@ -72,7 +72,7 @@ public final class DraftFiles {
         lastKept = current;
         model.begin(kept, current, surfaces);
         if (!current.equals(kept)) {
-            model.session().status().set(Words.of("restored"));
+            model.session().notices().warn(Words.of("restored"));
         }
     }
 
@@ -105,7 +105,7 @@ public final class DraftFiles {
                 done -> lastKept = done,
                 fault -> {
                     lastKept = drawing;
-                    model.session().status().set(Words.of("kept.not", FaultWords.of(fault)));
+                    model.session().notices().warn(Words.of("kept.not", FaultWords.of(fault)));
                 });
     }
 
@@ -142,11 +142,11 @@ public final class DraftFiles {
                         model.kept(drawing);
                     }
                     model.session()
-                            .status()
-                            .set(Words.of("saved", drawing.shapes().size(), written));
+                            .notices()
+                            .done(Words.of("saved", drawing.shapes().size(), written));
                     done.accept(written);
                 },
-                fault -> model.session().status().set(FaultWords.of(fault)));
+                fault -> model.session().notices().refuse(FaultWords.of(fault)));
     }
 
     /** Where there are none and no file has any, there is nothing to write. */
@@ -179,7 +179,7 @@ public final class DraftFiles {
                                     .status()
                                     .set(Words.of(
                                             "transect.saved", drawing.lines().size(), written)),
-                            fault -> model.session().status().set(FaultWords.of(fault)));
+                            fault -> model.session().notices().refuse(FaultWords.of(fault)));
                 }));
     }
 
@@ -192,7 +192,7 @@ public final class DraftFiles {
                             return set.workbench().solutes().transects(file);
                         },
                         this::add,
-                        fault -> model.session().status().set(FaultWords.of(fault)))));
+                        fault -> model.session().notices().refuse(FaultWords.of(fault)))));
     }
 
     private void add(List<Transect> transects) {
@@ -204,7 +204,7 @@ public final class DraftFiles {
             return drawing;
         });
         if (added) {
-            model.session().status().set(Words.of("transect.imported", transects.size()));
+            model.session().notices().done(Words.of("transect.imported", transects.size()));
         }
     }
 
@@ -217,7 +217,7 @@ public final class DraftFiles {
                             return set.workbench().drawing(file);
                         },
                         this::add,
-                        fault -> model.session().status().set(FaultWords.of(fault)))));
+                        fault -> model.session().notices().refuse(FaultWords.of(fault)))));
     }
 
     private void add(DrawingFile file) {
@@ -233,8 +233,8 @@ public final class DraftFiles {
         if (added) {
             String notes = String.join(" ", file.notes());
             model.session()
-                    .status()
-                    .set(Words.of("imported", shapes.size(), notes).strip());
+                    .notices()
+                    .done(Words.of("imported", shapes.size(), notes).strip(), Words.of("action.undo"), model::undo);
         }
     }
 

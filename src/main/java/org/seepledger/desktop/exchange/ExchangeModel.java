@@ -102,7 +102,7 @@ public final class ExchangeModel {
     public void copy() {
         matrix.ifPresent(shown -> {
             copies.table(shown.tabSeparated(belongs.get()), shown.html(belongs.get()));
-            session.status().set(Words.of("exchange.copied"));
+            session.notices().done(Words.of("exchange.copied"));
         });
     }
 

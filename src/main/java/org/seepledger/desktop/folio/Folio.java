@@ -38,6 +38,8 @@ public final class Folio {
     private final BorderPane pages = new BorderPane();
     private final ToggleGroup chosen = new ToggleGroup();
     private final HBox marks = new HBox();
+    private final LiveBudget live;
+    private final LivePlume plumes;
     private final Session session;
     private final LedgerModel ledger;
     private final TransectModel transects;
@@ -55,10 +57,10 @@ public final class Folio {
     public Folio(Session session, Tasks tasks, CopyBoard copies, FileDialogs dialogs, ObservableValue<Theme> theme) {
         this.session = session;
         Reading reading = new Reading(session);
-        LiveBudget live = new LiveBudget(session, tasks);
+        this.live = new LiveBudget(session, tasks);
         new FaceFeed(session, live, reading).begin();
         SoluteLook look = new SoluteLook(session);
-        LivePlume plumes = new LivePlume(session, look, tasks);
+        this.plumes = new LivePlume(session, look, tasks);
         MassReading masses = new MassReading(session, reading);
         this.ledger = new LedgerModel(session, live, reading, plumes, masses, copies);
         this.transects = new TransectModel(session, tasks, reading, masses, copies, dialogs);
@@ -121,6 +123,13 @@ public final class Folio {
     /** {@return the ribbon of time} */
     public Node ribbon() {
         return ribbon;
+    }
+
+    /** Works out again what was stopped or failed. */
+    public void again() {
+        live.again();
+        plumes.again();
+        transects.again();
     }
 
     /** {@return what can be done here} */

@@ -159,7 +159,7 @@ public final class LedgerModel {
             new LedgerCopy(belongs.get(), unit.get(), massUnit.get(), rows)
                     .table()
                     .on(copies);
-            session.status().set(Words.of("ledger.copied", belongs.get()));
+            session.notices().done(Words.of("ledger.copied", belongs.get()));
         }
     }
 

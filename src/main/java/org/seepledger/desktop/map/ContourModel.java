@@ -36,7 +36,7 @@ final class ContourModel {
     ContourModel(ValuesModel values, Overlays overlays, Tasks tasks) {
         this.values = values;
         this.overlays = overlays;
-        this.drawing = tasks.latest("drawing contours");
+        this.drawing = tasks.latest("task.contours");
         values.view().addListener((view, before, after) -> refresh());
         values.scale().addListener((scale, before, after) -> refresh());
         overlays.contours().addListener((wanted, before, after) -> refresh());

@@ -29,7 +29,7 @@ final class FluxModel {
     FluxModel(Session session, MapModel map, Tasks tasks) {
         this.session = session;
         this.map = map;
-        this.reading = tasks.latest("reading flux");
+        this.reading = tasks.latest("task.flux");
         map.camera().addListener((camera, before, after) -> refresh());
         map.overlays().arrows().addListener((wanted, before, after) -> refresh());
         session.layer().addListener((layer, before, after) -> refresh());

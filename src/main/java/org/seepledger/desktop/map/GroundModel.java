@@ -35,7 +35,7 @@ public final class GroundModel {
     public GroundModel(Session session, Tasks tasks, FileDialogs dialogs) {
         this.session = session;
         this.dialogs = dialogs;
-        this.reading = tasks.latest("reading the picture under the map");
+        this.reading = tasks.latest("task.ground");
         session.set().addListener((set, before, after) -> clear());
     }
 
@@ -55,9 +55,9 @@ public final class GroundModel {
                 },
                 read -> {
                     picture.set(Optional.of(read));
-                    session.status().set(Words.of("ground.laid", file.getFileName()));
+                    session.notices().done(Words.of("ground.laid", file.getFileName()));
                 },
-                fault -> session.status().set(FaultWords.of(fault)));
+                fault -> session.notices().refuse(FaultWords.of(fault)));
     }
 
     /** Takes the picture away. */

@@ -48,7 +48,7 @@ final class MapCanvas extends Region {
         this.model = model;
         this.under = under;
         this.theme = theme;
-        this.tiles = new Tiles(tasks.each("colouring tiles", 1), this::repaintGround);
+        this.tiles = new Tiles(tasks.each("task.colouring", 1), this::repaintGround);
         getChildren().addAll(ground, above);
         Session session = model.session();
         Observable[] causes = {

@@ -22,6 +22,7 @@ import org.seepledger.desktop.words.Words;
 import org.seepledger.job.GridLayer;
 import org.seepledger.job.MapQuantity;
 import org.seepledger.picture.ValueScale;
+import org.seepledger.progress.Cancelled;
 import org.seepledger.progress.Progress;
 
 /** Which values of which layer lie over the map, and in which colours. */
@@ -43,7 +44,7 @@ public final class ValuesModel {
 
     ValuesModel(Session session, Tasks tasks) {
         this.session = session;
-        this.reading = tasks.latest("reading the map");
+        this.reading = tasks.latest("task.map");
         session.set().addListener((set, before, after) -> begin(after));
         session.layer().addListener((layer, before, after) -> refresh());
         session.interval().addListener((interval, before, after) -> refresh());
@@ -93,7 +94,15 @@ public final class ValuesModel {
         reading.run(
                 progress -> read(set, shown, request, progress),
                 this::show,
-                fault -> state.set(PaneState.failed(FaultWords.of(fault))));
+                fault -> state.set(PaneState.failed(
+                        fault instanceof Cancelled ? Words.of("stopped.again") : FaultWords.of(fault))));
+    }
+
+    /** Reads again what was stopped or failed. */
+    public void again() {
+        if (state.get().phase() == PaneState.Phase.FAILED) {
+            refresh();
+        }
     }
 
     private static LayerView read(OpenSet set, Lattice lattice, LayerView.Request request, Progress progress) {

@@ -17,7 +17,7 @@ import org.seepledger.sketch.ControlLine;
  * @param kept the prisms and transects that lie beside it
  * @param unsaved prisms and transects that were drawn and not saved when the program last ended
  */
-public record Opening(OpenSet set, DrawingFile kept, Optional<DrawingFile> unsaved) {
+public record Opening(OpenSet set, DrawingFile kept, Optional<DrawingFile> unsaved) implements AutoCloseable {
 
     /** What the prisms beside an aquifer are called. */
     public static final String PRISMS = "prisms.geojson";
@@ -51,6 +51,11 @@ public record Opening(OpenSet set, DrawingFile kept, Optional<DrawingFile> unsav
             set.close();
             throw e;
         }
+    }
+
+    @Override
+    public void close() {
+        set.close();
     }
 
     /** Of the two files there may be one alone. */

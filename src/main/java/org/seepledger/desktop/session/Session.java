@@ -9,6 +9,7 @@ import javafx.beans.property.SimpleIntegerProperty;
 import javafx.beans.property.SimpleObjectProperty;
 import javafx.beans.property.SimpleStringProperty;
 import javafx.beans.property.StringProperty;
+import org.seepledger.desktop.notice.Notices;
 import org.seepledger.prism.Prism;
 import org.seepledger.report.CellPlace;
 
@@ -25,6 +26,7 @@ public final class Session {
     private final StringProperty lit = new SimpleStringProperty("");
     private final StringProperty solute = new SimpleStringProperty("");
     private final StringProperty status = new SimpleStringProperty("");
+    private final Notices notices = new Notices();
     private final ObjectProperty<FaceFlows> faceFlows = new SimpleObjectProperty<>(FaceFlows.NONE);
     private final ObjectProperty<Optional<CellPlace>> target = new SimpleObjectProperty<>(Optional.empty());
     private final ObjectProperty<Demand> demand = new SimpleObjectProperty<>(Demand.NONE);
@@ -104,12 +106,17 @@ public final class Session {
         return lit;
     }
 
+    /** {@return what has been done, what to know, what was refused} */
+    public Notices notices() {
+        return notices;
+    }
+
     /** {@return the name of the solute whose budget is looked at; empty for water's} */
     public StringProperty solute() {
         return solute;
     }
 
-    /** {@return what the status line says} */
+    /** {@return what the status line says can be done now} */
     public StringProperty status() {
         return status;
     }

@@ -16,6 +16,11 @@ import javafx.scene.layout.StackPane;
 import org.seepledger.desktop.action.Action;
 import org.seepledger.desktop.action.Actions;
 import org.seepledger.desktop.action.ActionsPage;
+import org.seepledger.desktop.notice.NoticeLine;
+import org.seepledger.desktop.notice.NoticePage;
+import org.seepledger.desktop.running.RunningList;
+import org.seepledger.desktop.running.RunningModel;
+import org.seepledger.desktop.running.RunningStrip;
 
 /** The window's frame. */
 public final class ShellView extends StackPane {
@@ -31,6 +36,8 @@ public final class ShellView extends StackPane {
     private final BorderPane work = new BorderPane();
     private final StackPane veil = new StackPane();
     private final ActionsPage actionsPage;
+    private final NoticePage noticePage;
+    private final RunningList runningList;
     private final CautionPage cautionPage = new CautionPage(this::lift);
 
     /**
@@ -39,15 +46,21 @@ public final class ShellView extends StackPane {
      * @param model which page is shown
      * @param slots what is put into the frame
      * @param actions everything that can be done
+     * @param running what runs beside the window
      */
-    public ShellView(ShellModel model, Slots slots, Actions actions) {
+    public ShellView(ShellModel model, Slots slots, Actions actions, RunningModel running) {
         this.model = model;
         this.slots = slots;
         this.actions = actions;
         this.actionsPage = new ActionsPage(actions, this::lift);
         work.setTop(new Caption(model, slots.showing(), this::showActions));
         work.setCenter(panes());
-        work.setBottom(new Footer(model, this::showCaution));
+        this.noticePage = new NoticePage(model.session().notices(), this::lift);
+        this.runningList = new RunningList(running, this::lift);
+        work.setBottom(new Footer(
+                new NoticeLine(model.session().notices(), model.session().status(), this::showNotices),
+                new RunningStrip(running, this::showRunning),
+                this::showCaution));
         veil.getStyleClass().add("sl-veil");
         veil.setVisible(false);
         veil.setOnMousePressed(press -> {
@@ -88,6 +101,18 @@ public final class ShellView extends StackPane {
     public void showCaution() {
         lower(cautionPage);
         cautionPage.requestFocus();
+    }
+
+    /** Shows all notices. */
+    public void showNotices() {
+        lower(noticePage);
+        noticePage.open();
+    }
+
+    /** Shows all that runs beside the window. */
+    public void showRunning() {
+        lower(runningList);
+        runningList.open();
     }
 
     /** Moves the keyboard to the next pane. */
@@ -160,7 +185,7 @@ public final class ShellView extends StackPane {
 
     private boolean isKept(KeyEvent key) {
         Node owner = getScene().getFocusOwner();
-        if (key.getCode().isFunctionKey()) {
+        if (key.getCode().isFunctionKey() || key.getCode() == KeyCode.ESCAPE && key.isShiftDown()) {
             return false;
         }
         if (owner instanceof TextInputControl) {

@@ -59,13 +59,13 @@ public final class LivePlume {
         this.session = session;
         this.look = look;
         this.now = new Inquiry<>(
-                tasks.latest("solutes of the interval"),
+                tasks.latest("task.solutes.interval"),
                 (question, progress) -> question.set
                         .workbench()
                         .solutes()
                         .interval(question.prism, question.interval, question.choice, progress));
         this.whole = new Inquiry<>(
-                tasks.latest("solutes of the record"),
+                tasks.latest("task.solutes.record"),
                 (question, progress) ->
                         question.set.workbench().solutes().record(question.prisms, question.choice, progress));
         session.set().addListener((set, before, after) -> begin());
@@ -95,6 +95,13 @@ public final class LivePlume {
     /** {@return how it stands with the whole record} */
     public ReadOnlyObjectProperty<PaneState> recordState() {
         return whole.state();
+    }
+
+    /** Works out again what was stopped or failed. */
+    public void again() {
+        now.again();
+        whole.again();
+        follow();
     }
 
     private void begin() {

@@ -35,6 +35,11 @@ public final class BackgroundTasks implements Tasks {
     }
 
     @Override
+    public List<Running> running() {
+        return lanes.stream().flatMap(BackgroundLane::running).toList();
+    }
+
+    @Override
     public void close() {
         lanes.forEach(BackgroundLane::close);
     }

@@ -7,6 +7,7 @@ import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
 import org.seepledger.desktop.words.FaultWords;
 import org.seepledger.desktop.words.Words;
+import org.seepledger.progress.Cancelled;
 import org.seepledger.progress.Progress;
 
 /**
@@ -131,6 +132,13 @@ public final class Inquiry<Q, A> {
         return PaneState.working(Words.of(last.get().isPresent() ? "budget.working.shown" : "budget.working"));
     }
 
+    /** Makes that a question which was stopped or failed is asked again when it is next wanted. */
+    public void again() {
+        if (asked.isEmpty()) {
+            wanted = Optional.empty();
+        }
+    }
+
     /**
      * Wants nothing, but keeps the last answer.
      *
@@ -177,7 +185,7 @@ public final class Inquiry<Q, A> {
     private void notAnswered(Q question, Throwable fault) {
         asked = Optional.empty();
         if (wanted.equals(Optional.of(question))) {
-            tell(PaneState.failed(FaultWords.of(fault)));
+            tell(PaneState.failed(fault instanceof Cancelled ? Words.of("stopped.again") : FaultWords.of(fault)));
         }
         askNext(question);
     }

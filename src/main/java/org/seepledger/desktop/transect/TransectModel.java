@@ -84,9 +84,9 @@ public final class TransectModel {
         this.masses = masses;
         this.copies = copies;
         this.dialogs = dialogs;
-        this.files = tasks.latest("measured panels");
-        this.now = inquiry(tasks.latest("transects in the interval"));
-        this.whole = inquiry(tasks.latest("transects over the record"));
+        this.files = tasks.latest("task.panels");
+        this.now = inquiry(tasks.latest("task.transects.interval"));
+        this.whole = inquiry(tasks.latest("task.transects.record"));
         session.set().addListener((set, before, after) -> begin());
         session.transects().addListener((transects, before, after) -> fill());
         session.transect().addListener((name, before, after) -> fill());
@@ -158,6 +158,13 @@ public final class TransectModel {
     /** Asks the map to begin a transect. */
     public void draw() {
         session.demand().set(Session.Demand.DRAW_TRANSECT);
+    }
+
+    /** Works out again what was stopped or failed. */
+    public void again() {
+        now.again();
+        whole.again();
+        show();
     }
 
     private void fill() {
@@ -276,7 +283,7 @@ public final class TransectModel {
                             return opened.workbench().solutes().panels(file);
                         },
                         this::add,
-                        fault -> session.status().set(FaultWords.of(fault)))));
+                        fault -> session.notices().refuse(FaultWords.of(fault)))));
     }
 
     private void add(List<MeasuredPanels> panels) {
@@ -287,14 +294,14 @@ public final class TransectModel {
                 .filter(choice -> choice.measured == first)
                 .findFirst()
                 .ifPresent(choice -> chosen.set(Optional.of(choice)));
-        session.status().set(Words.of("transect.panels.added", panels.size()));
+        session.notices().done(Words.of("transect.panels.added", panels.size()));
     }
 
     /** Copies the table with its units, in full precision. */
     public void copy() {
         table.get().ifPresent(shown -> {
             shown.copy().on(copies);
-            session.status().set(Words.of("transect.copied", shown.whose()));
+            session.notices().done(Words.of("transect.copied", shown.whose()));
         });
     }
 }

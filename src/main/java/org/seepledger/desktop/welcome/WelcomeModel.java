@@ -17,6 +17,7 @@ import org.seepledger.desktop.task.PaneState;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.words.FaultWords;
 import org.seepledger.desktop.words.Words;
+import org.seepledger.progress.Cancelled;
 
 /** What can be opened, and the opening of it. */
 public final class WelcomeModel {
@@ -50,8 +51,8 @@ public final class WelcomeModel {
         this.dialogs = dialogs;
         this.folders = folders;
         this.opened = opened;
-        this.opening = tasks.latest("opening");
-        this.looking = tasks.latest("looking for folders");
+        this.opening = tasks.latest("task.opening");
+        this.looking = tasks.latest("task.looking");
     }
 
     /**
@@ -108,13 +109,17 @@ public final class WelcomeModel {
     private void read(Path folder) {
         state.set(PaneState.working(Words.of("open.working", folder.getFileName())));
         opening.run(
-                progress -> Opening.of(folder),
+                progress -> {
+                    progress.begin(folder.toString(), 0);
+                    return Opening.of(folder);
+                },
                 result -> {
                     state.set(PaneState.READY);
                     folders.remember(result.set().path());
                     opened.accept(result);
                 },
-                fault -> state.set(PaneState.failed(FaultWords.of(fault))));
+                fault -> state.set(
+                        fault instanceof Cancelled ? PaneState.READY : PaneState.failed(FaultWords.of(fault))));
     }
 
     /**

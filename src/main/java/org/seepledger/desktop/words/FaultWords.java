@@ -2,6 +2,7 @@ package org.seepledger.desktop.words;
 
 import org.seepledger.fault.DataFault;
 import org.seepledger.fault.UsageFault;
+import org.seepledger.progress.Cancelled;
 
 /** What went wrong, as a sentence. */
 public final class FaultWords {
@@ -16,6 +17,9 @@ public final class FaultWords {
     public static String of(Throwable fault) {
         if (fault instanceof DataFault || fault instanceof UsageFault) {
             return fault.getMessage();
+        }
+        if (fault instanceof Cancelled) {
+            return Words.of("fault.stopped");
         }
         if (fault instanceof OutOfMemoryError) {
             return Words.of("fault.memory");

@@ -146,8 +146,9 @@ public record PrismsReader(
         Prism left = clipped(edge, prism, spot);
         String share = String.format(Locale.ROOT, "%.3g %%", 100 * edge.shareOutside(prism, left));
         if (left.rings().isEmpty()) {
+            Side first = prism.rings().get(0).sides().get(0);
             throw spot.fault(
-                    "a polygon that lies outside the grid",
+                    "a polygon that lies outside the grid, with a corner at " + Place.shown(first.x(), first.y()),
                     "a polygon on the grid, which has " + extent(),
                     crs.isLocal() ? remedyForLocal(prism) : "Check the coordinates and the CRS of both.");
         }

@@ -49,6 +49,11 @@ public record MassUnits(
                 own.in(givenVolume));
     }
 
+    /** {@return the units of a budget whose amounts are masses} */
+    public ResultUnits ofBudget() {
+        return new ResultUnits(rate, mass, rateFactor, massFactor);
+    }
+
     /**
      * {@return how many of a unit of concentration one kilogram in a length³ of the set is}
      *

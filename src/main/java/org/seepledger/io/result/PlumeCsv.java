@@ -42,11 +42,13 @@ public final class PlumeCsv {
         "net_mass_nd_half",
         "net_mass_nd_limit"
     };
-    private static final String METHOD =
+    /** How masses and flows of a solute are worked out, in a few sentences. */
+    public static final String METHOD =
             "Solutes: mass in place is total porosity x concentration, and dry bulk density x"
                     + " what the isotherm gives, over saturated rock; flow is the water's times the concentration of the cell that"
                     + " the water leaves, mean of an interval's two ends. Non-detects count half their limit; nd_zero and nd_limit"
                     + " say what 0 and the limit would give: a bracket, not an estimate.";
+
     private static final String NONE = "";
 
     private final Times times;

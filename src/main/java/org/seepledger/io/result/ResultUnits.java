@@ -3,10 +3,10 @@ package org.seepledger.io.result;
 import org.seepledger.unit.Measure;
 
 /**
- * The units that results are given in.
+ * The units that results are given in: those of water, or of a solute with kilograms in place of length³.
  *
  * @param rate unit of rates
- * @param volume unit of volumes
+ * @param volume unit of volumes; of masses in a solute's budget
  * @param rateFactor how many of it one length³/time of the set is
  * @param volumeFactor how many of it one length³ of the set is
  */

@@ -2,7 +2,6 @@ package org.seepledger.io.result;
 
 import java.io.IOException;
 import java.nio.file.Path;
-import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import org.seepledger.aquifer.Times;
@@ -141,10 +140,9 @@ public final class TransectCsv {
 
     private void end(ByChoice panels, Optional<Period> period, Measure unit) throws IOException {
         Panels shown = panels.of(NonDetects.HALF);
-        double flow = Arrays.stream(shown.flows()).sum();
         double mass =
                 period.map(covered -> shown.discharge() * covered.duration()).orElse(Double.NaN);
-        cells(CsvText.number(shown.area()), CsvText.number(flow), rate(shown));
+        cells(CsvText.number(shown.area()), CsvText.number(shown.flow()), rate(shown));
         cells(CsvText.number(mass * units.massFactor()));
         cells(rate(panels.of(NonDetects.ZERO)), rate(panels.of(NonDetects.LIMIT)));
         cells(CsvText.number(shown.fluxAveraged() * MassUnits.concentrationFactor(unit, length)));

@@ -26,8 +26,11 @@ final class AnswerSection {
     static DomContent of(Report report) {
         return section(
                         h2("The answer"),
-                        p("Rates are means over the whole record, " + report.span(report.record()) + "."),
-                        report.results().size() > 1 ? TotalsTable.ofPrisms(report) : text(""),
+                        p("Rates are means over the whole record, "
+                                + report.frame().span(report.record()) + "."),
+                        report.results().size() > 1
+                                ? TotalsTable.ofRecords(report.frame(), "All prisms", "Prism", report.lines())
+                                : text(""),
                         each(report.results(), result -> of(report, result)))
                 .withId("answer");
     }

@@ -16,14 +16,14 @@ import org.seepledger.ledger.PeriodBudget;
 import org.seepledger.ledger.Total;
 import org.seepledger.report.Term;
 
-/** The rows of a budget table. Those that have a row in {@code budget.csv} say so in their data attributes. */
+/** The rows of a budget table. Those that have a row in {@code budget.csv} or {@code plume.csv} say so in their data attributes. */
 final class BudgetRows {
 
-    private final Report report;
+    private final BudgetFrame frame;
     private final PeriodBudget budget;
 
-    BudgetRows(Report report, PeriodBudget budget) {
-        this.report = report;
+    BudgetRows(BudgetFrame frame, PeriodBudget budget) {
+        this.frame = frame;
         this.budget = budget;
     }
 
@@ -60,8 +60,7 @@ final class BudgetRows {
     }
 
     private String layer(Entry entry) {
-        int layer = entry.account().layer();
-        return report.aquifer().layers().get(layer).name();
+        return frame.layer(entry.account().layer());
     }
 
     /** The sum of some items; what cannot be given counts as 0 in it, as in totals. */
@@ -82,7 +81,7 @@ final class BudgetRows {
     }
 
     private DomContent amount(double volume) {
-        return Cells.number(report.amount(volume, budget.period()));
+        return Cells.number(frame.amount(volume, budget.period()));
     }
 
     /** A total, which stands under net. */

@@ -23,7 +23,7 @@ import org.seepledger.ledger.Total;
 import org.seepledger.report.Term;
 import org.seepledger.report.Wording;
 
-/** The budget of a prism and period as a table: items with their layers, groups with their sums, totals. */
+/** The budget of a prism and period as a table, of water or of a solute: items with their layers, groups with their sums, totals. */
 final class BudgetTable {
 
     /** Up to so many sides stand in the table itself. */
@@ -31,28 +31,28 @@ final class BudgetTable {
 
     private static final int COLUMNS = 5;
 
-    private final Report report;
-    private final String prism;
+    private final BudgetFrame frame;
+    private final About about;
     private final PeriodBudget budget;
     private final BudgetRows rows;
 
-    private BudgetTable(Report report, String prism, PeriodBudget budget) {
-        this.report = report;
-        this.prism = prism;
+    private BudgetTable(BudgetFrame frame, About about, PeriodBudget budget) {
+        this.frame = frame;
+        this.about = about;
         this.budget = budget;
-        this.rows = new BudgetRows(report, budget);
+        this.rows = new BudgetRows(frame, budget);
     }
 
     /** The table, and a second one for the smallest of very many sides. */
-    static DomContent of(Report report, String prism, PeriodBudget budget) {
-        return new BudgetTable(report, prism, budget).write();
+    static DomContent of(BudgetFrame frame, About about, PeriodBudget budget) {
+        return new BudgetTable(frame, about, budget).write();
     }
 
     private DomContent write() {
         List<Term> folded = folded();
-        String title = prism + ": " + budget.period().name() + ", " + report.amountsAndUnit();
+        String title = about.name() + ": " + budget.period().name() + ", " + frame.amountsAndUnit();
         List<DomContent> bodies = new ArrayList<>();
-        for (Group group : List.of(Group.SIDE, Group.LID, Group.SOURCE, Group.STORAGE)) {
+        for (Group group : Group.values()) {
             List<Term> terms = Term.of(budget).stream()
                     .filter(term -> term.group() == group)
                     .toList();
@@ -65,7 +65,7 @@ final class BudgetTable {
     }
 
     private TableTag framed(String title, List<DomContent> bodies) {
-        return table(
+        return about.mark(table(
                         Cells.caption(title),
                         thead(tr(
                                 Cells.column("Item"),
@@ -73,9 +73,8 @@ final class BudgetTable {
                                 Cells.numberColumn("Out"),
                                 Cells.numberColumn("Net"),
                                 Cells.numberColumn("Of throughput"))),
-                        each(bodies.stream()))
+                        each(bodies.stream())))
                 .withClass("budget")
-                .withData("prism", prism)
                 .withData("period", budget.period().name());
     }
 
@@ -129,7 +128,7 @@ final class BudgetTable {
     }
 
     private DomContent fold(List<Term> folded) {
-        String title = prism + ": " + budget.period().name() + ", the smaller sides, " + report.amountsAndUnit();
+        String title = about.name() + ": " + budget.period().name() + ", the smaller sides, " + frame.amountsAndUnit();
         DomContent body =
                 tbody(folded.stream().flatMap(term -> rows.of(term).stream()).toArray(DomContent[]::new));
         return details(

@@ -34,7 +34,7 @@ final class ExchangeSection {
     }
 
     private static DomContent flows(Report report) {
-        String title = "Exchange: record, " + report.amountsAndUnit();
+        String title = "Exchange: record, " + report.frame().amountsAndUnit();
         List<ExchangeFlow> flows = report.exchange().stream()
                 .filter(flow -> flow.volume(report.record()) != 0)
                 .toList();
@@ -53,7 +53,7 @@ final class ExchangeSection {
         return tr(
                         Cells.row(flow.giver()),
                         td(flow.receiver()),
-                        Cells.number(report.amount(flow.volume(report.record()), report.record())))
+                        Cells.number(report.frame().amount(flow.volume(report.record()), report.record())))
                 .withData("giver", flow.giver())
                 .withData("receiver", flow.receiver());
     }

@@ -26,8 +26,8 @@ final class InputsSection {
 
     private InputsSection() {}
 
-    static DomContent files(Report report) {
-        List<FileRecord> inputs = report.statement().inputs();
+    static DomContent files(Cover cover) {
+        List<FileRecord> inputs = cover.statement().inputs();
         String title = "Input files, their sizes and SHA-256";
         DomContent files = Cells.scrolling(
                 title,
@@ -52,7 +52,7 @@ final class InputsSection {
                 td(code(file.sha256()).withClass("hash")));
     }
 
-    static DomContent origins(Report report) {
+    static DomContent origins(Cover cover) {
         String title = "Where terms come from, as the set states";
         return section(
                         h2("Origins and uncertainties"),
@@ -69,7 +69,7 @@ final class InputsSection {
                                                 Cells.column("Origin"),
                                                 Cells.column("Reference"),
                                                 Cells.column("Standard deviation"))),
-                                        tbody(each(report.statement().origins(), InputsSection::row)))))
+                                        tbody(each(cover.statement().origins(), InputsSection::row)))))
                 .withId("origins");
     }
 

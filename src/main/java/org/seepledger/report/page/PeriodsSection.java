@@ -6,17 +6,18 @@ import static j2html.TagCreator.p;
 import static j2html.TagCreator.section;
 
 import j2html.tags.DomContent;
+import java.util.List;
 
-/** The totals of each prism by period. */
+/** The totals of each budget by period. */
 final class PeriodsSection {
 
     private PeriodsSection() {}
 
-    static DomContent of(Report report) {
+    static DomContent of(BudgetFrame frame, List<TotalsTable.Line> lines, String file) {
         return section(
                         h2("Periods"),
-                        p("Totals by period. All rows of every period stand in budget.csv."),
-                        each(report.results(), result -> TotalsTable.ofPeriods(report, result)))
+                        p("Totals by period. All rows of every period stand in " + file + "."),
+                        each(lines, line -> TotalsTable.ofPeriods(frame, line)))
                 .withId("periods");
     }
 }

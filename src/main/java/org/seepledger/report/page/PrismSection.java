@@ -28,6 +28,7 @@ final class PrismSection {
         PrismResult result = report.results().get(prism);
         PrismPictures pictures = report.pictures().get(prism);
         String id = id(prism);
+        About about = report.lines().get(prism).about();
         return section(
                         h2(result.prism()),
                         pictures(
@@ -39,7 +40,7 @@ final class PrismSection {
                                 Figure.of(pictures.blocks(), id + "-blocks", caption(pictures.blocks())),
                                 Figure.of(pictures.series(), id + "-series", caption(pictures.series())),
                                 Figure.of(pictures.storage(), id + "-storage", caption(pictures.storage()))),
-                        tables(report, result),
+                        tables(report, about, result),
                         ClosureSection.of(report, result, pictures, id))
                 .withId(id)
                 .withClass("prism");
@@ -54,14 +55,14 @@ final class PrismSection {
         return any ? section(h3(title), each(figures)) : text("");
     }
 
-    private static DomContent tables(Report report, PrismResult result) {
-        List<PeriodBudget> budgets = report.tables().of(result);
+    private static DomContent tables(Report report, About about, PrismResult result) {
+        List<PeriodBudget> budgets = report.tables().of(result.budget());
         return section(
                 h3("Budget"),
                 p(
                         "In and out are gross and never negative; net is in less out, and beside it its share of throughput. Rows of a layer add up to their item,"
                                 + " items to their group. Items without any flow are not shown by layer."
                                 + " A dash is a number that cannot be given."),
-                each(budgets, budget -> BudgetTable.of(report, result.prism(), budget)));
+                each(budgets, budget -> BudgetTable.of(report.frame(), about, budget)));
     }
 }

@@ -22,8 +22,8 @@ final class RemarksSection {
     private RemarksSection() {}
 
     /** The first warnings, before the answer; nothing where there are none. */
-    static DomContent first(Report report) {
-        List<String> warnings = report.statement().warnings();
+    static DomContent first(Cover cover) {
+        List<String> warnings = cover.statement().warnings();
         if (warnings.isEmpty()) {
             return text("");
         }
@@ -37,11 +37,11 @@ final class RemarksSection {
     }
 
     /** All warnings where not all of them stand before the answer, and the notes. */
-    static DomContent all(Report report) {
-        List<String> warnings = report.statement().warnings();
+    static DomContent all(Cover cover) {
+        List<String> warnings = cover.statement().warnings();
         return each(
                 warnings.size() > WARNINGS_FIRST ? list("All warnings", "all-warnings", warnings) : text(""),
-                report.notes().isEmpty() ? text("") : list("Notes", "notes", report.notes()));
+                cover.notes().isEmpty() ? text("") : list("Notes", "notes", cover.notes()));
     }
 
     private static DomContent list(String title, String id, List<String> lines) {

@@ -22,9 +22,13 @@ import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
+import java.util.List;
+import java.util.Map;
 import java.util.stream.IntStream;
 import org.seepledger.ledger.Disclaimer;
+import org.seepledger.ledger.SoluteCautions;
 import org.seepledger.report.InkStyle;
+import org.seepledger.report.PrismResult;
 
 /** Writes a report as one HTML page (the HTML standard of WHATWG) that needs nothing but itself. */
 public final class ReportPage {
@@ -32,50 +36,94 @@ public final class ReportPage {
     private ReportPage() {}
 
     /**
-     * {@return the page}
+     * {@return the page of a report on water}
      *
      * @param report what it is made of
      */
     public static String of(Report report) {
+        Cover cover = report.cover();
+        List<String> prisms = report.results().stream().map(PrismResult::prism).toList();
+        return page(
+                cover,
+                TitleBlock.of(cover, report.frame(), report.record(), prisms, List.of()),
+                TitleBlock.contents(cover, report.lines(), Map.of("exchange", "Exchange")),
+                List.of(),
+                each(
+                        AnswerSection.of(report),
+                        each(IntStream.range(0, report.results().size())
+                                .mapToObj(prism -> PrismSection.of(report, prism))),
+                        ExchangeSection.of(report),
+                        PeriodsSection.of(report.frame(), report.lines(), "budget.csv")),
+                MethodSection.of(cover));
+    }
+
+    /**
+     * {@return the page of a report on solutes}
+     *
+     * @param report what it is made of
+     */
+    public static String of(SoluteReport report) {
+        Cover cover = report.cover();
+        return page(
+                cover,
+                TitleBlock.of(cover, report.frame(), report.record(), report.prisms(), report.solutes()),
+                TitleBlock.contents(
+                        cover,
+                        report.lines(),
+                        report.crossings().isEmpty() && report.measured().isEmpty()
+                                ? Map.of()
+                                : Map.of(TransectsSection.ID, "Transects")),
+                SoluteCautions.sentences(),
+                each(
+                        SoluteAnswerSection.of(report),
+                        each(IntStream.range(0, report.results().size())
+                                .mapToObj(plume -> PlumeSection.of(report, plume))),
+                        TransectsSection.of(report),
+                        PeriodsSection.of(report.frame(), report.lines(), "plume.csv")),
+                MethodSection.ofSolutes(cover));
+    }
+
+    private static String page(
+            Cover cover,
+            DomContent title,
+            DomContent contents,
+            List<String> cautions,
+            DomContent results,
+            DomContent method) {
         return document(html(
-                        head(report),
+                        head(cover),
                         body(
                                 a("Skip to the answer").withHref("#answer").withClass("skip"),
-                                TitleBlock.of(report),
-                                aside(disclaimer()).withClass("disclaimer").attr("aria-label", "Disclaimer"),
-                                TitleBlock.contents(report),
-                                main(content(report)),
-                                footer(h2("Disclaimer"), disclaimer())
+                                title,
+                                aside(disclaimer(), each(cautions, sentence -> p(sentence)))
+                                        .withClass("disclaimer")
+                                        .attr("aria-label", "Disclaimer"),
+                                contents,
+                                main(
+                                        RemarksSection.first(cover),
+                                        results,
+                                        InputsSection.files(cover),
+                                        InputsSection.origins(cover),
+                                        method,
+                                        RemarksSection.all(cover)),
+                                footer(h2("Disclaimer"), disclaimer(), each(cautions, sentence -> p(sentence)))
                                         .withId("disclaimer")
                                         .withClass("disclaimer")))
                 .withLang("en"));
     }
 
-    private static HeadTag head(Report report) {
-        String name = report.masthead().title();
+    private static HeadTag head(Cover cover) {
+        String name = cover.masthead().title();
         HeadTag head = TagCreator.head(
                 meta().withCharset("utf-8"),
                 title(name),
                 meta().withName("viewport").withContent("width=device-width, initial-scale=1"),
                 meta().withName("color-scheme").withContent("light dark"),
-                meta().withName("generator").withContent("Seepledger " + report.version()));
-        report.masthead()
+                meta().withName("generator").withContent("Seepledger " + cover.version()));
+        cover.masthead()
                 .author()
                 .ifPresent(author -> head.with(meta().withName("author").withContent(author)));
         return head.with(style(rawHtml(InkStyle.css() + sheet() + PageFooter.css(name))));
-    }
-
-    private static DomContent content(Report report) {
-        return each(
-                RemarksSection.first(report),
-                AnswerSection.of(report),
-                each(IntStream.range(0, report.results().size()).mapToObj(prism -> PrismSection.of(report, prism))),
-                ExchangeSection.of(report),
-                PeriodsSection.of(report),
-                InputsSection.files(report),
-                InputsSection.origins(report),
-                MethodSection.of(report),
-                RemarksSection.all(report));
     }
 
     private static DomContent disclaimer() {

@@ -35,10 +35,10 @@ import org.seepledger.report.Wording;
 public final class ReportPictures {
 
     /** How wide pictures are, in logical pixels: the measure of the page. */
-    private static final double WIDTH = 760;
+    static final double WIDTH = 760;
 
     /** More rows or columns than this are thinned out: they could not be told apart. */
-    private static final int MOST_CELLS = 300;
+    static final int MOST_CELLS = 300;
 
     private final Aquifer aquifer;
     private final List<Prism> prisms;

@@ -4,7 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Set;
 import org.seepledger.ledger.PeriodBudget;
-import org.seepledger.report.PrismResult;
+import org.seepledger.report.BudgetCourse;
 
 /**
  * Which budgets of a prism get a table of all their rows.
@@ -25,18 +25,18 @@ public record TableChoice(boolean record, boolean worst, boolean all, Set<String
      * The chosen budgets of a prism: the record first, then periods in their order; the record where the choice comes to
      * nothing, as the worst period does where there is but one.
      */
-    List<PeriodBudget> of(PrismResult result) {
-        List<PeriodBudget> chosen = new ArrayList<>(result.periods());
-        chosen.removeIf(budget -> !isChosen(budget, result));
+    List<PeriodBudget> of(BudgetCourse course) {
+        List<PeriodBudget> chosen = new ArrayList<>(course.periods());
+        chosen.removeIf(budget -> !isChosen(budget, course));
         if (record || chosen.isEmpty()) {
-            chosen.add(0, result.record());
+            chosen.add(0, course.record());
         }
         return chosen;
     }
 
-    private boolean isChosen(PeriodBudget budget, PrismResult result) {
-        boolean isRecord = budget.period().equals(result.record().period());
-        boolean isWorst = worst && result.worstPeriod().filter(budget::equals).isPresent();
+    private boolean isChosen(PeriodBudget budget, BudgetCourse course) {
+        boolean isRecord = budget.period().equals(course.record().period());
+        boolean isWorst = worst && course.worstPeriod().filter(budget::equals).isPresent();
         return !(isRecord && record)
                 && (all || isWorst || names.contains(budget.period().name()));
     }

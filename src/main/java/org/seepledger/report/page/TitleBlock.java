@@ -18,7 +18,8 @@ import static j2html.TagCreator.time;
 import j2html.tags.DomContent;
 import java.util.ArrayList;
 import java.util.List;
-import org.seepledger.report.PrismResult;
+import java.util.Map;
+import org.seepledger.ledger.Period;
 import org.seepledger.report.Wording;
 
 /** The head of the first page: letterhead, title, who, what and when; and the contents. */
@@ -26,60 +27,74 @@ final class TitleBlock {
 
     private TitleBlock() {}
 
-    static DomContent of(Report report) {
-        Masthead masthead = report.masthead();
+    /**
+     * The head of a report.
+     *
+     * @param cover what every report has
+     * @param frame the units
+     * @param record the whole record
+     * @param prisms the prisms' names
+     * @param solutes the solutes' names; none for a report on water
+     */
+    static DomContent of(Cover cover, BudgetFrame frame, Period record, List<String> prisms, List<String> solutes) {
+        Masthead masthead = cover.masthead();
         return header(
                         iff(
                                 !masthead.letterhead().isEmpty(),
                                 div(each(masthead.letterhead(), line -> p(line)))
                                         .withClass("letterhead")),
                         h1(masthead.title()),
-                        dl(facts(report).toArray(DomContent[]::new)).withClass("facts"))
+                        dl(facts(cover, frame, record, prisms, solutes).toArray(DomContent[]::new))
+                                .withClass("facts"))
                 .withClass("title-block");
     }
 
-    private static List<DomContent> facts(Report report) {
-        Masthead masthead = report.masthead();
+    private static List<DomContent> facts(
+            Cover cover, BudgetFrame frame, Period record, List<String> prisms, List<String> solutes) {
+        Masthead masthead = cover.masthead();
         List<DomContent> facts = new ArrayList<>();
         masthead.author().ifPresent(author -> facts.add(fact("Author", author)));
         masthead.reference().ifPresent(reference -> facts.add(fact("Reference", reference)));
         String date = masthead.date().toString();
         facts.add(div(dt("Date"), dd(time(date).attr("datetime", date))));
-        facts.add(fact("Aquifer", report.aquifer().name()));
-        facts.add(fact("Prisms", prisms(report)));
+        facts.add(fact("Aquifer", cover.aquifer().name()));
+        facts.add(fact("Prisms", Wording.listed(prisms)));
+        if (!solutes.isEmpty()) {
+            facts.add(fact("Solutes", Wording.listed(solutes)));
+        }
         facts.add(fact(
                 "Record",
-                report.span(report.record()) + ", "
-                        + Wording.counted(report.aquifer().times().intervals(), "interval")));
-        facts.add(fact("Coordinates", report.crs().orElse("local")));
+                frame.span(record) + ", "
+                        + Wording.counted(cover.aquifer().times().intervals(), "interval")));
+        facts.add(fact("Coordinates", cover.crs().orElse("local")));
         facts.add(fact(
                 "Units",
-                report.wording().unit(report.units().rate()) + ", "
-                        + report.wording().unit(report.units().volume())));
-        facts.add(fact("Made with", "Seepledger " + report.version()));
+                frame.wording().unit(frame.units().rate()) + ", "
+                        + frame.wording().unit(frame.units().volume())));
+        facts.add(fact("Made with", "Seepledger " + cover.version()));
         return facts;
-    }
-
-    private static String prisms(Report report) {
-        return Wording.listed(report.results().stream().map(PrismResult::prism).toList());
     }
 
     private static DomContent fact(String name, String value) {
         return div(dt(name), dd(value));
     }
 
-    /** Where to find what. */
-    static DomContent contents(Report report) {
+    /**
+     * Where to find what.
+     *
+     * @param cover what every report has
+     * @param lines the budgets that have sections of their own
+     * @param more further sections, by id
+     */
+    static DomContent contents(Cover cover, List<TotalsTable.Line> lines, Map<String, String> more) {
         List<DomContent> links = new ArrayList<>();
-        if (!report.statement().warnings().isEmpty()) {
+        if (!cover.statement().warnings().isEmpty()) {
             links.add(link("#warnings", "Warnings"));
         }
         links.add(link("#answer", "The answer"));
-        for (int prism = 0; prism < report.results().size(); prism++) {
-            links.add(link(
-                    "#" + PrismSection.id(prism), report.results().get(prism).prism()));
-        }
-        links.add(link("#exchange", "Exchange"));
+        lines.forEach(
+                line -> links.add(link("#" + line.about().id(), line.about().name())));
+        more.forEach((id, name) -> links.add(link("#" + id, name)));
         links.add(link("#periods", "Periods"));
         links.add(link("#inputs", "Inputs"));
         links.add(link("#origins", "Origins"));

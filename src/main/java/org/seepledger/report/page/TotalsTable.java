@@ -14,54 +14,57 @@ import j2html.tags.specialized.TrTag;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.function.UnaryOperator;
-import java.util.stream.IntStream;
 import org.seepledger.ledger.PeriodBudget;
 import org.seepledger.ledger.Total;
-import org.seepledger.report.PrismResult;
+import org.seepledger.report.BudgetCourse;
 
-/** The totals of budgets, a row for each: of all prisms over the record, or of a prism by period. */
+/** The totals of budgets, a row for each: of all over the record, or of one by period. */
 final class TotalsTable {
 
-    private final Report report;
+    private final BudgetFrame frame;
     private final List<Total> totals;
 
-    private TotalsTable(Report report) {
-        this.report = report;
-        this.totals = Total.rows(report.results().get(0).storageKnown());
+    /**
+     * A budget.
+     *
+     * @param about what it is of
+     * @param budget the budget
+     */
+    record Line(About about, BudgetCourse budget) {}
+
+    private TotalsTable(BudgetFrame frame, boolean storageKnown) {
+        this.frame = frame;
+        this.totals = Total.rows(storageKnown);
     }
 
-    /** All prisms over the record, each with a link to its section. */
-    static DomContent ofPrisms(Report report) {
-        TotalsTable table = new TotalsTable(report);
-        List<TrTag> rows = IntStream.range(0, report.results().size())
-                .mapToObj(table::ofPrism)
-                .toList();
+    /** All budgets over the record, each with a link to its section. */
+    static DomContent ofRecords(BudgetFrame frame, String all, String column, List<Line> lines) {
+        TotalsTable table = new TotalsTable(frame, lines.get(0).budget().storageKnown());
         return table.framed(
-                "All prisms over the record, ",
-                List.of(Cells.column("Prism")),
-                rows,
+                all + " over the record, ",
+                List.of(Cells.column(column)),
+                lines.stream().map(table::ofRecord).toList(),
                 framed -> framed.withClass("glance"));
     }
 
-    private TrTag ofPrism(int prism) {
-        PrismResult result = report.results().get(prism);
-        DomContent name = Cells.row("").with(a(result.prism()).withHref("#" + PrismSection.id(prism)));
-        return row(List.of(name), result.record()).withData("prism", result.prism());
+    private TrTag ofRecord(Line line) {
+        DomContent name = Cells.row("")
+                .with(a(line.about().name()).withHref("#" + line.about().id()));
+        return line.about().mark(row(List.of(name), line.budget().record()));
     }
 
-    /** A prism by period. */
-    static DomContent ofPeriods(Report report, PrismResult result) {
-        TotalsTable table = new TotalsTable(report);
-        List<TrTag> rows = result.periods().stream().map(table::ofPeriod).toList();
+    /** A budget by period. */
+    static DomContent ofPeriods(BudgetFrame frame, Line line) {
+        TotalsTable table = new TotalsTable(frame, line.budget().storageKnown());
         return table.framed(
-                result.prism() + ": totals by period, ",
+                line.about().name() + ": totals by period, ",
                 List.of(Cells.column("Period"), Cells.column("From, to")),
-                rows,
-                framed -> framed.withClass("periods").withData("prism", result.prism()));
+                line.budget().periods().stream().map(table::ofPeriod).toList(),
+                framed -> line.about().mark(framed.withClass("periods")));
     }
 
     private TrTag ofPeriod(PeriodBudget budget) {
-        DomContent span = td(report.span(budget.period())).withClass("span");
+        DomContent span = td(frame.span(budget.period())).withClass("span");
         return row(List.of(Cells.row(budget.period().name()), span), budget)
                 .withData("period", budget.period().name());
     }
@@ -70,8 +73,7 @@ final class TotalsTable {
         List<DomContent> cells = new ArrayList<>(names);
         for (Total total : totals) {
             double value = budget.totals().get(total);
-            cells.add(
-                    total.isPercentage() ? Cells.percent(value) : Cells.number(report.amount(value, budget.period())));
+            cells.add(total.isPercentage() ? Cells.percent(value) : Cells.number(frame.amount(value, budget.period())));
         }
         return tr(cells.toArray(DomContent[]::new));
     }
@@ -79,7 +81,7 @@ final class TotalsTable {
     private DomContent framed(String title, List<DomContent> names, List<TrTag> rows, UnaryOperator<TableTag> marked) {
         List<DomContent> columns = new ArrayList<>(names);
         totals.forEach(total -> columns.add(Cells.numberColumn(capital(total.toString()))));
-        String caption = title + report.amountsAndUnit();
+        String caption = title + frame.amountsAndUnit();
         TableTag table = table(
                 Cells.caption(caption), thead(tr(columns.toArray(DomContent[]::new))), tbody(each(rows, row -> row)));
         return Cells.scrolling(caption, marked.apply(table));

@@ -187,4 +187,20 @@ class LiveBudgetTest {
         assertThat(live.known().get()).isEqualTo(Known.NOTHING);
         assertThat(live.now().get().phase()).isEqualTo(Phase.EMPTY);
     }
+
+    @Test
+    void whatWasStoppedSaysSoAndIsTakenUpAgain() {
+        show();
+        tasks.stop();
+        tasks.stop();
+        assertThat(live.now().get().phase()).isEqualTo(Phase.FAILED);
+        assertThat(live.record().get().phase()).isEqualTo(Phase.FAILED);
+        assertThat(live.record().get().words()).contains("Stopped");
+        tasks.all();
+        assertThat(live.record().get().phase()).isEqualTo(Phase.FAILED);
+        live.again();
+        tasks.all();
+        assertThat(live.now().get().phase()).isEqualTo(Phase.READY);
+        assertThat(live.record().get().phase()).isEqualTo(Phase.READY);
+    }
 }

@@ -349,7 +349,7 @@ class DraftTest {
         Drawing drawn = model.drawing();
         reopen();
         assertThat(model.drawing()).isEqualTo(drawn);
-        assertThat(session.status().get()).contains("not saved last time");
+        assertThat(session.notices().latest().get().orElseThrow().words()).contains("not saved last time");
         assertThat(model.isUnsaved()).isTrue();
         model.undo();
         assertThat(vertex("well field", 0)).isEqualTo(new Place(500921, 5201227));
@@ -398,7 +398,7 @@ class DraftTest {
         assertThat(model.drawing().find("well field 2")).isPresent();
         answers.paths.add(Optional.of(folder.resolve("none.geojson")));
         files.importFile();
-        assertThat(session.status().get()).contains("none.geojson");
+        assertThat(session.notices().latest().get().orElseThrow().words()).contains("none.geojson");
         answers.paths.add(Optional.empty());
         files.export();
         assertThat(answers.paths).isEmpty();

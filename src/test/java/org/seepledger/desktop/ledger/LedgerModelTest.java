@@ -140,7 +140,8 @@ class LedgerModelTest {
                 .anyMatch(line -> line.startsWith("closure error\t\t\t") && line.endsWith("\t%"));
         assertThat(tabs).startsWith("well field").contains(Disclaimer.text());
         assertThat(html).contains("<caption>well field", "<td>" + exact + "</td><td>m3/d</td>", Disclaimer.text());
-        assertThat(valley.session.status().get()).startsWith("Copied the budget of well field");
+        assertThat(valley.session.notices().latest().get().orElseThrow().words())
+                .startsWith("Copied the budget of well field");
     }
 
     @Test

@@ -62,14 +62,15 @@ class GroundModelTest {
     void aPictureInAnotherSystemIsRefusedWithTheRemedy() throws IOException {
         choose("EPSG:32632");
         assertThat(model.picture().get()).isEmpty();
-        assertThat(session.status().get()).contains("EPSG:32632", "gdalwarp -t_srs EPSG:32633");
+        assertThat(session.notices().latest().get().orElseThrow().words())
+                .contains("EPSG:32632", "gdalwarp -t_srs EPSG:32633");
     }
 
     @Test
     void whatIsNoPictureIsSaid() {
         answers.paths.add(Optional.of(Path.of("README.md")));
         model.choose();
-        assertThat(session.status().get()).contains("README.md");
+        assertThat(session.notices().latest().get().orElseThrow().words()).contains("README.md");
         answers.paths.add(Optional.empty());
         model.choose();
         assertThat(model.picture().get()).isEmpty();

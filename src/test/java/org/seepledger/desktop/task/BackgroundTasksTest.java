@@ -120,4 +120,81 @@ class BackgroundTasksTest {
         answer();
         assertThat(heard).containsExactly(full);
     }
+
+    private Running awaitRunning(CountDownLatch begun) throws InterruptedException {
+        assertThat(begun.await(10, TimeUnit.SECONDS)).isTrue();
+        return tasks.running().get(0);
+    }
+
+    @Test
+    void whatRunsSaysWhatItIsAndHowFar() throws InterruptedException {
+        CountDownLatch begun = new CountDownLatch(1);
+        CountDownLatch enough = new CountDownLatch(1);
+        tasks.latest("task.opening")
+                .run(
+                        progress -> {
+                            progress.begin("reading", 4);
+                            progress.step();
+                            begun.countDown();
+                            return enough.await(10, TimeUnit.SECONDS);
+                        },
+                        heard::add,
+                        heard::add);
+        Running running = awaitRunning(begun);
+        assertThat(running.name()).isEqualTo("task.opening");
+        assertThat(running.share()).isEqualTo(0.25);
+        assertThat(running.listens()).isTrue();
+        assertThat(tasks.running()).containsExactly(running);
+        enough.countDown();
+        answer();
+        assertThat(tasks.running()).isEmpty();
+    }
+
+    @Test
+    void workThatIsStoppedIsToldAtOnceAndEndsAtItsNextStep() throws InterruptedException {
+        CountDownLatch begun = new CountDownLatch(1);
+        CountDownLatch ended = new CountDownLatch(1);
+        tasks.latest("a lane")
+                .run(
+                        progress -> {
+                            progress.begin("counting", Long.MAX_VALUE);
+                            begun.countDown();
+                            try {
+                                while (true) {
+                                    progress.step();
+                                }
+                            } finally {
+                                ended.countDown();
+                            }
+                        },
+                        heard::add,
+                        heard::add);
+        Running running = awaitRunning(begun);
+        running.stop();
+        assertThat(heard).hasSize(1).first().isInstanceOf(Cancelled.class);
+        assertThat(ended.await(10, TimeUnit.SECONDS)).isTrue();
+        answer();
+        running.stop();
+        assertThat(heard).hasSize(1);
+    }
+
+    @Test
+    void whatStoppedWorkHadOpenedIsClosed() throws InterruptedException {
+        CountDownLatch begun = new CountDownLatch(1);
+        CountDownLatch stopped = new CountDownLatch(1);
+        CountDownLatch closed = new CountDownLatch(1);
+        tasks.latest("a lane")
+                .<AutoCloseable>run(
+                        progress -> {
+                            begun.countDown();
+                            stopped.await();
+                            return closed::countDown;
+                        },
+                        heard::add,
+                        heard::add);
+        awaitRunning(begun).stop();
+        stopped.countDown();
+        answer();
+        assertThat(closed.await(10, TimeUnit.SECONDS)).isTrue();
+    }
 }

@@ -1,6 +1,7 @@
 package org.seepledger.desktop.task;
 
 import java.time.Duration;
+import java.util.List;
 import java.util.function.Consumer;
 import org.seepledger.progress.Progress;
 
@@ -15,6 +16,11 @@ public final class DirectTasks implements Tasks {
     @Override
     public Lane each(String name, int threads) {
         return new DirectLane();
+    }
+
+    @Override
+    public List<Running> running() {
+        return List.of();
     }
 
     @Override

@@ -17,7 +17,7 @@ import org.seepledger.fault.DataFault;
 class WordsTest {
 
     private static final ResourceBundle BUNDLE = ResourceBundle.getBundle("org.seepledger.desktop.words");
-    private static final Pattern KEY = Pattern.compile("Words\\.of\\(\\s*\"([a-z.]+)\"\\s*[,)]");
+    private static final Pattern KEY = Pattern.compile("(?:Words\\.of|\\.latest|\\.each)\\(\\s*\"([^\"]+)\"\\s*[,)]");
 
     private static String sources() throws IOException {
         StringBuilder text = new StringBuilder();
@@ -30,7 +30,7 @@ class WordsTest {
     }
 
     @Test
-    void everyKeyInUseHasWords() throws IOException {
+    void everyKeyInUseHasWordsAlsoThoseOfLanes() throws IOException {
         Matcher keys = KEY.matcher(sources());
         while (keys.find()) {
             String key = keys.group(1);

@@ -268,7 +268,7 @@ class PrismsReaderFaultsTest {
                         + " expected a polygon within the grid, which has corners at x 0, y 0 and x 100, y 100. Draw it"
                         + " within the grid, or cut it at the grid's edge with --clip.");
         String away = collection(feature("\"name\": \"A\"", "Polygon", "[[[160,20],[240,20],[240,60],[160,20]]]"));
-        assertRefused(away).hasMessageContaining("found a polygon that lies outside the grid");
+        assertRefused(away).hasMessageContaining("found a polygon that lies outside the grid, with a corner at ");
         assertRefused(away, PlanCrs.local(), true)
                 .hasMessageContaining("the aquifer's crs is null, so that both must be in the same local ones.");
         String degrees =
