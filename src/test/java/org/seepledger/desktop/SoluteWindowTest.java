@@ -128,7 +128,7 @@ class SoluteWindowTest {
 
     @Test
     void aTransectDrawnByHandIsTheCommandsTableForTheExportedOnes() throws IOException {
-        window.type(KeyCode.L);
+        window.type(KeyCode.D);
         window.robot.clickOn(window.onMap(63, 25));
         window.robot.clickOn(window.onMap(71, 58));
         window.robot.doubleClickOn(window.onMap(60, 97));
@@ -193,7 +193,7 @@ class SoluteWindowTest {
         show(Path.of("sample-aquifers/terrace"));
         assertThat(all).noneMatch(this::isThere);
         assertThat(isThere("#ledger-table")).isTrue();
-        window.type(KeyCode.L);
+        window.type(KeyCode.D);
         assertThat(window.assembly().draft().tool().get()).isEqualTo(org.seepledger.desktop.draw.Tool.SELECT);
     }
 }

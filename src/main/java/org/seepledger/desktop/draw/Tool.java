@@ -19,7 +19,7 @@ public enum Tool {
     /** Makes the selected prism and another one. */
     MERGE("M"),
     /** Draws a transect vertex by vertex; of sets with solutes alone. */
-    TRANSECT("L");
+    TRANSECT("D");
 
     private final String keys;
 

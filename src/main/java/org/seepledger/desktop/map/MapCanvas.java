@@ -135,6 +135,11 @@ final class MapCanvas extends Region {
         tiles.wear(model.values().view().get(), model.values().scale().get(), opacity);
         tiles.pyramid().ifPresent(pyramid -> new TilePainter(canvas, camera, outputScale(), tiles, pyramid).paint());
         MarkPainter painter = new MarkPainter(canvas, theme.getValue());
+        model.values()
+                .view()
+                .get()
+                .flatMap(LayerView::limits)
+                .ifPresent(limits -> painter.paint(NonDetectHatch.of(limits, camera)));
         if (model.overlays().lines().get()) {
             painter.paint(GridLines.of(aquifer.grid(), camera, outputScale()));
         }
