@@ -161,7 +161,7 @@ public final class PlumeDrawing {
             String name = instant == 0 || instant == result.end()
                     ? aquifer.times().isoDate(time).orElseGet(() -> wording.number(time) + " " + aquifer.timeUnit())
                     : "";
-            stops.add(new PlumeTrack.Stop(at.x(), at.y(), at.along() / unit, at.across() / unit, at.direction(), name));
+            stops.add(PlumeTrack.Stop.of(at, unit, name));
         }
         return new PlumeTrack(stops);
     }
