@@ -10,6 +10,7 @@ import static com.tngtech.archunit.library.dependencies.SlicesRuleDefinition.sli
 
 import com.tngtech.archunit.base.DescribedPredicate;
 import com.tngtech.archunit.core.domain.JavaClass;
+import com.tngtech.archunit.core.domain.properties.HasName;
 import com.tngtech.archunit.core.importer.ImportOption;
 import com.tngtech.archunit.junit.AnalyzeClasses;
 import com.tngtech.archunit.junit.ArchTest;
@@ -129,6 +130,19 @@ class HouseTest {
             .dependOnClassesThat()
             .resideInAPackage("picocli..")
             .because("a job must not know whether a command line or a window asked for it");
+
+    @ArchTest
+    static final ArchRule GUESSES_WRITE_NO_FILES = noClasses()
+            .that()
+            .resideInAPackage(ROOT + "intake..")
+            .should()
+            .callMethodWhere(target(owner(type("java.nio.file.Files")))
+                    .and(target(HasName.Predicates.nameMatching(
+                            "write.*|new.*(Writer|OutputStream)|copy|move|delete.*|create.*|set.*"))))
+            .orShould()
+            .dependOnClassesThat()
+            .resideInAnyPackage(ROOT + "balance..", ROOT + "prism..", ROOT + "report..")
+            .because("what a person brings is only read, and what it is can be told without a budget");
 
     @ArchTest
     static final ArchRule ENGINE_KNOWS_NO_FILES = noClasses()

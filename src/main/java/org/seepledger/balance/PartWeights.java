@@ -14,7 +14,7 @@ import org.seepledger.aquifer.Window;
  * <p>A plane of cells is given out once an interval no longer rests on it, so that memory does not grow with the number
  * of intervals; numbers that belong to no cell are given out at the end.
  */
-final class PartWeights {
+public final class PartWeights {
 
     private record Key(String file, String place) {}
 
@@ -53,12 +53,22 @@ final class PartWeights {
     private final Sums sums = new Sums(2);
     private long count;
 
-    PartWeights(Trace.Lines lines) {
+    /**
+     * Begins with none.
+     *
+     * @param lines takes what is given out
+     */
+    public PartWeights(Trace.Lines lines) {
         this.lines = lines;
     }
 
-    /** Adds the weights of a quantity's values in a block to those of the parts that it is made of. */
-    void add(List<Stored> parts, double[] weights) {
+    /**
+     * Adds the weights of a quantity's values in a block to those of the parts that it is made of.
+     *
+     * @param parts what the values are the sum of
+     * @param weights by cell of the block's window, row-major
+     */
+    public void add(List<Stored> parts, double[] weights) {
         for (Stored part : parts) {
             if (part.everywhere()) {
                 addNumber(part, weights);
@@ -83,8 +93,12 @@ final class PartWeights {
         }
     }
 
-    /** Gives out what the interval just done does not rest on. */
-    void giveOutPast(Window window) {
+    /**
+     * Gives out what the interval just done does not rest on.
+     *
+     * @param window the block's window
+     */
+    public void giveOutPast(Window window) {
         for (Iterator<Plane> all = planes.values().iterator(); all.hasNext(); ) {
             Plane plane = all.next();
             if (!plane.current) {
@@ -95,8 +109,12 @@ final class PartWeights {
         }
     }
 
-    /** Gives out all planes of a block. */
-    void giveOutPlanes(Window window) {
+    /**
+     * Gives out all planes of a block.
+     *
+     * @param window the block's window
+     */
+    public void giveOutPlanes(Window window) {
         planes.values().forEach(plane -> giveOut(plane, window));
         planes.clear();
     }
@@ -111,7 +129,7 @@ final class PartWeights {
     }
 
     /** Gives out the numbers that belong to no cell. */
-    void giveOutNumbers() {
+    public void giveOutNumbers() {
         numbers.forEach((key, weight) -> line(key.file(), key.place(), key.value(), weight));
     }
 
@@ -122,7 +140,8 @@ final class PartWeights {
         count++;
     }
 
-    Trace.Sum sum() {
+    /** {@return what all that was given out comes to} */
+    public Trace.Sum sum() {
         return new Trace.Sum(sums.get(0), sums.get(1), count);
     }
 }

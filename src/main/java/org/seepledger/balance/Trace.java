@@ -18,9 +18,7 @@ import org.seepledger.progress.Progress;
  *
  * <p>A row is linear in what was given. Its weights are found by booking ones in place of the given values, with the
  * same code that books the budget, so that there is but one account of how a number comes about. Values far enough
- * apart not to act on the same column of cells are booked at once (Curtis, Powell and Reid 1974, J. Inst. Maths Applics
- * 13, 117–119): a value acts on its own column and the eight around it, so that nine bookings serve for any number of
- * them.
+ * apart not to act on the same column of cells are booked at once ({@link OnesApart}).
  */
 public final class Trace {
 

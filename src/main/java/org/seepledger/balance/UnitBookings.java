@@ -16,9 +16,6 @@ import org.seepledger.aquifer.Window;
 /** Books ones in place of given values, in one band and interval, to learn the values' weights. */
 final class UnitBookings {
 
-    /** A value that drives flow acts on its own cell and its neighbours: every third may be booked at once. */
-    private static final int APART = 3;
-
     private final PrismAccounts accounts;
     private final Optional<Elevations> elevations;
     private final Response response;
@@ -71,37 +68,7 @@ final class UnitBookings {
     }
 
     private double[] acrossColumns(int input, int layer) {
-        double[] found = new double[block.size()];
-        for (int firstRow = 0; firstRow < APART; firstRow++) {
-            for (int firstColumn = 0; firstColumn < APART; firstColumn++) {
-                boolean[] lit = lit(firstRow, firstColumn);
-                ColumnSums sums = booked(response.unit(input, layer, lit));
-                for (int row = inner.row(); row < inner.rowEnd(); row++) {
-                    for (int column = inner.column(); column < inner.columnEnd(); column++) {
-                        double sum = sums.get(row, column);
-                        if (sum != 0) {
-                            found[block.index(nearest(row, firstRow), nearest(column, firstColumn))] += sum;
-                        }
-                    }
-                }
-            }
-        }
-        return found;
-    }
-
-    private boolean[] lit(int firstRow, int firstColumn) {
-        boolean[] lit = new boolean[block.size()];
-        for (int row = block.row(); row < block.rowEnd(); row++) {
-            for (int column = block.column(); column < block.columnEnd(); column++) {
-                lit[block.index(row, column)] = row % APART == firstRow && column % APART == firstColumn;
-            }
-        }
-        return lit;
-    }
-
-    /** The row or column with a one that is the given one or next to it. */
-    private static int nearest(int index, int first) {
-        return index + Math.floorMod(first - index + 1, APART) - 1;
+        return OnesApart.weights(block, inner, lit -> booked(response.unit(input, layer, lit))::get);
     }
 
     /** Adds the weights of wells' rates; wells in one column of cells are booked one after the other. */

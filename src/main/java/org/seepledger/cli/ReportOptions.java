@@ -15,9 +15,6 @@ import picocli.CommandLine.Option;
 /** The options that say what the report looks like. */
 final class ReportOptions {
 
-    private static final int LONGEST = 200;
-    private static final int MOST_LINES = 8;
-
     @Option(
             names = "--report-title",
             paramLabel = "TEXT",
@@ -69,8 +66,10 @@ final class ReportOptions {
             return Optional.empty();
         }
         String line = text.strip();
-        if (line.isEmpty() || line.length() > LONGEST || line.chars().anyMatch(Character::isISOControl)) {
-            throw new UsageFault(option + " must be one line of 1 to " + LONGEST + " letters.");
+        if (line.isEmpty()
+                || line.length() > ReportRequest.LONGEST
+                || line.chars().anyMatch(Character::isISOControl)) {
+            throw new UsageFault(option + " must be one line of 1 to " + ReportRequest.LONGEST + " letters.");
         }
         return Optional.of(line);
     }
@@ -83,9 +82,9 @@ final class ReportOptions {
                 .map(text ->
                         line("--report-letterhead, each part between |,", text).orElseThrow())
                 .toList();
-        if (lines.size() > MOST_LINES) {
-            throw new UsageFault(
-                    "--report-letterhead has " + lines.size() + " lines; give " + MOST_LINES + " at the most.");
+        if (lines.size() > ReportRequest.MOST_LINES) {
+            throw new UsageFault("--report-letterhead has " + lines.size() + " lines; give " + ReportRequest.MOST_LINES
+                    + " at the most.");
         }
         return lines;
     }

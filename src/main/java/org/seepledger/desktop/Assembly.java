@@ -13,12 +13,16 @@ import org.seepledger.desktop.draw.DraftHand;
 import org.seepledger.desktop.draw.DraftModel;
 import org.seepledger.desktop.draw.Tray;
 import org.seepledger.desktop.folio.Folio;
+import org.seepledger.desktop.handover.HandoverModel;
+import org.seepledger.desktop.handover.HandoverPage;
 import org.seepledger.desktop.map.GroundModel;
 import org.seepledger.desktop.map.MapModel;
 import org.seepledger.desktop.map.MapView;
 import org.seepledger.desktop.map.ShowingBar;
+import org.seepledger.desktop.paint.PicturePng;
 import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.port.FileDialogs;
+import org.seepledger.desktop.port.Opener;
 import org.seepledger.desktop.port.Questions;
 import org.seepledger.desktop.port.RecentFolders;
 import org.seepledger.desktop.running.RunningModel;
@@ -53,7 +57,13 @@ final class Assembly {
     private final Scene scene;
 
     /** What the window asks of the machine. */
-    record Outside(Tasks tasks, FileDialogs dialogs, Questions questions, CopyBoard copies, RecentFolders folders) {}
+    record Outside(
+            Tasks tasks,
+            FileDialogs dialogs,
+            Questions questions,
+            CopyBoard copies,
+            RecentFolders folders,
+            Opener opener) {}
 
     Assembly(Outside outside, List<Path> samplePlaces) {
         this.outside = outside;
@@ -87,6 +97,13 @@ final class Assembly {
         actions.add(mapView.actions());
         actions.add(new DraftActions(draft, hand, files, tray, mapView::repaint).all(map));
         actions.add(folio.actions());
+        HandoverModel handover = new HandoverModel(
+                session, outside.tasks(), outside.dialogs(), outside.copies(), outside.opener(), new PicturePng());
+        HandoverPage handoverPage = new HandoverPage(handover, view::lift);
+        actions.add(List.of(new Action("actions.group.file", "action.handover", "Shortcut+E", () -> {
+            view.lower(handoverPage);
+            handoverPage.open();
+        })));
         this.scene = new Scene(view, 1280, 800);
         Dress.put(scene, shell.theme());
         welcome.look(samplePlaces);

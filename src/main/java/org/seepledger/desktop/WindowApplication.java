@@ -5,6 +5,7 @@ import java.util.prefs.Preferences;
 import javafx.application.Application;
 import javafx.application.Platform;
 import javafx.stage.Stage;
+import org.seepledger.desktop.platform.HostOpener;
 import org.seepledger.desktop.platform.PreferredFolders;
 import org.seepledger.desktop.platform.ScreenCopyBoard;
 import org.seepledger.desktop.platform.ScreenDialogs;
@@ -33,7 +34,8 @@ public final class WindowApplication extends Application {
                         new ScreenDialogs(stage),
                         new ScreenQuestions(stage),
                         new ScreenCopyBoard(),
-                        new PreferredFolders(Preferences.userRoot().node("org/seepledger/desktop"))),
+                        new PreferredFolders(Preferences.userRoot().node("org/seepledger/desktop")),
+                        new HostOpener(getHostServices())),
                 Samples.usualPlaces());
         stage.setTitle(Words.of("program"));
         stage.setMinWidth(LEAST_WIDTH);

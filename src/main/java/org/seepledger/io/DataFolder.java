@@ -5,6 +5,8 @@ import java.nio.file.Files;
 import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Map;
+import java.util.Optional;
 import org.seepledger.fault.DataFault;
 
 /**
@@ -18,10 +20,12 @@ public final class DataFolder {
 
     private final Path folder;
     private final String shownFile;
+    private final Optional<Map<String, Path>> listed;
 
-    private DataFolder(Path folder, String shownFile) {
+    private DataFolder(Path folder, String shownFile, Optional<Map<String, Path>> listed) {
         this.folder = folder;
         this.shownFile = shownFile;
+        this.listed = listed;
     }
 
     /**
@@ -31,7 +35,17 @@ public final class DataFolder {
      * @param shownFile the file as the user named it, for messages
      */
     public static DataFolder holding(Path file, String shownFile) {
-        return new DataFolder(file.toAbsolutePath().getParent(), shownFile);
+        return new DataFolder(file.toAbsolutePath().getParent(), shownFile, Optional.empty());
+    }
+
+    /**
+     * {@return a folder that is yet to be made, whose files lie elsewhere}
+     *
+     * @param files where they lie, by the path that they will have in the folder
+     * @param shownFile the file that names them, for messages
+     */
+    public static DataFolder of(Map<String, Path> files, String shownFile) {
+        return new DataFolder(Path.of(""), shownFile, Optional.of(Map.copyOf(files)));
     }
 
     /**
@@ -44,6 +58,9 @@ public final class DataFolder {
      */
     public Path resolve(String relative, String place) {
         Path path = inside(relative, place);
+        if (listed.isPresent()) {
+            return listed(relative, place);
+        }
         if (!Files.exists(path)) {
             throw missing(relative, path, place);
         }
@@ -56,6 +73,14 @@ public final class DataFolder {
         }
         if (!Files.isRegularFile(path)) {
             throw fault(place, shown(relative) + ", which is not a plain file", "Name the file itself.");
+        }
+        return path;
+    }
+
+    private Path listed(String relative, String place) {
+        Path path = listed.orElseThrow().get(relative);
+        if (path == null) {
+            throw fault(place, shown(relative) + ", which is not among the files", "Bring the file too.");
         }
         return path;
     }

@@ -4,6 +4,7 @@ import java.io.IOException;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.function.BiConsumer;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.Times;
 import org.seepledger.balance.Balance;
@@ -21,8 +22,10 @@ import org.seepledger.io.result.Statement;
 import org.seepledger.ledger.Ledger;
 import org.seepledger.ledger.Period;
 import org.seepledger.ledger.PeriodBudget;
+import org.seepledger.prism.Prism;
 import org.seepledger.progress.Progress;
 import org.seepledger.report.BalanceSummary;
+import org.seepledger.report.page.PrismPictures;
 
 /** The water budget of prisms: reads, balances, writes the result files. */
 public final class BalanceJob {
@@ -57,14 +60,26 @@ public final class BalanceJob {
      * @throws org.seepledger.progress.Cancelled if the work was stopped; nothing is written then
      */
     public static BalanceOutcome run(BalanceRequest request, Progress progress) {
+        return run(request, (prisms, pictures) -> {}, progress);
+    }
+
+    /**
+     * Does the job and lets the report's pictures be used otherwise.
+     *
+     * @param request what is asked for
+     * @param also takes the prisms and the pictures of each
+     * @param progress told how far the work is
+     */
+    static BalanceOutcome run(
+            BalanceRequest request, BiConsumer<List<Prism>, List<PrismPictures>> also, Progress progress) {
         Stopwatch stopwatch = new Stopwatch();
         try (OutputFolder out = OutputFolder.at(request.out(), "balance", request.overwrite());
                 Subject subject = Subject.open(request.aquifer(), request.prisms(), request.clip())) {
-            return new BalanceJob(request, subject, stopwatch, progress).run(out);
+            return new BalanceJob(request, subject, stopwatch, progress).run(out, also);
         }
     }
 
-    private BalanceOutcome run(OutputFolder out) {
+    private BalanceOutcome run(OutputFolder out, BiConsumer<List<Prism>, List<PrismPictures>> also) {
         stopwatch.lap("reading");
         Aquifer aquifer = subject.aquifer();
         Balance balance = WaterBalance.of(aquifer, subject.prisms(), request.wells(), request.threads(), progress);
@@ -76,14 +91,16 @@ public final class BalanceJob {
         subject.warnings().addAll(words.warnings(records));
         subject.notes().addAll(words.remarks(request.wells()));
         List<PrismBudget> budgets = balance.ledgers().stream().map(this::budget).toList();
-        write(out, balance, budgets, records);
+        also.accept(subject.prisms(), write(out, balance, budgets, records));
         List<String> files = out.written();
         out.publish();
         String summary = BalanceSummary.of(aquifer, balance, budgets, units, subject.warnings(), subject.notes());
         return new BalanceOutcome(summary, worst(budgets), files);
     }
 
-    private void write(OutputFolder out, Balance balance, List<PrismBudget> budgets, List<PeriodBudget> records) {
+    /** Writes all files; gives the report's pictures. */
+    private List<PrismPictures> write(
+            OutputFolder out, Balance balance, List<PrismBudget> budgets, List<PeriodBudget> records) {
         Times times = subject.aquifer().times();
         Statement statement =
                 subject.statement("Water budget of \"" + subject.aquifer().name() + "\"", progress);
@@ -92,9 +109,11 @@ public final class BalanceJob {
             ExchangeCsv.write(out.file("exchange.csv"), statement, balance.exchange(), periods, times, units);
             FacesGeoJson.write(out.file("faces.geojson"), subject.crs(), subject.prisms(), records, units);
             writeImbalance(balance, out);
-            report.write(out, subject, balance, budgets, units, statement, optionsOfResult());
+            List<PrismPictures> pictures =
+                    report.write(out, subject, balance, budgets, units, statement, optionsOfResult());
             RunRecord.write(
                     out, "balance", options(), statement, subject.notes(), RunRecord.checks(balance), stopwatch);
+            return pictures;
         } catch (IOException e) {
             throw new UsageFault("The results cannot be written beside " + request.out() + " (" + Unreadable.reason(e)
                     + "). Make room or name another folder.");

@@ -36,4 +36,23 @@ public record BalanceRequest(
         boolean clip,
         int threads,
         boolean overwrite,
-        ReportRequest report) {}
+        ReportRequest report) {
+
+    /** The same request with its results in another folder. */
+    BalanceRequest into(Path folder) {
+        return new BalanceRequest(
+                aquifer,
+                prisms,
+                folder,
+                every,
+                periods,
+                waterYearStart,
+                rateUnit,
+                volumeUnit,
+                wells,
+                clip,
+                threads,
+                overwrite,
+                report);
+    }
+}

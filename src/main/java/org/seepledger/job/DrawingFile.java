@@ -9,7 +9,6 @@ import org.seepledger.io.prisms.SurfaceRasters;
 import org.seepledger.sketch.ControlLine;
 import org.seepledger.sketch.Drawing;
 import org.seepledger.sketch.Limit;
-import org.seepledger.sketch.Reach;
 import org.seepledger.sketch.Shape;
 
 /**
@@ -42,14 +41,8 @@ public record DrawingFile(Drawing drawing, Map<Limit.Surface, GriddedValues> sur
     static DrawingFile of(Drawing drawing, DataFolder folder, SurfaceRasters rasters, List<String> notes) {
         Map<Limit.Surface, GriddedValues> surfaces = new HashMap<>();
         for (Shape shape : drawing.shapes()) {
-            if (shape.reach() instanceof Reach.Between between) {
-                for (var lid : List.of(between.top(), between.bottom())) {
-                    lid.filter(Limit.Surface.class::isInstance)
-                            .map(Limit.Surface.class::cast)
-                            .ifPresent(surface -> surfaces.put(
-                                    surface,
-                                    rasters.read(folder.resolve(surface.path(), shape.name()), surface.path())));
-                }
+            for (Limit.Surface surface : shape.reach().surfaces()) {
+                surfaces.put(surface, rasters.read(folder.resolve(surface.path(), shape.name()), surface.path()));
             }
         }
         return new DrawingFile(drawing, surfaces, notes);

@@ -11,4 +11,10 @@ import java.nio.file.Path;
  * @param clip whether prisms are cut at the grid's edge
  * @param overwrite whether an earlier run's files may be replaced
  */
-public record ExtractRequest(Path aquifer, Path prisms, Path out, boolean clip, boolean overwrite) {}
+public record ExtractRequest(Path aquifer, Path prisms, Path out, boolean clip, boolean overwrite) {
+
+    /** The same request with its results in another folder. */
+    ExtractRequest into(Path folder) {
+        return new ExtractRequest(aquifer, prisms, folder, clip, overwrite);
+    }
+}

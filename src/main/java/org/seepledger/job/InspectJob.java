@@ -38,21 +38,34 @@ public final class InspectJob {
      */
     public static String run(Path folder, int threads, Progress progress) {
         try (AquiferFolder opened = AquiferReader.open(folder)) {
-            Aquifer aquifer = opened.aquifer();
-            List<ValueRange> ranges = Survey.of(aquifer, opened.quantities(), progress);
-            Prism whole = whole(aquifer);
-            Balance balance = WaterBalance.of(aquifer, List.of(whole), WellRule.POINT, threads, progress);
-            PeriodBudget record = balance.ledgers().get(0).budget(new Periods(aquifer.times()).record());
-            RunWarnings words = new RunWarnings(aquifer, balance.notes());
-            List<String> warnings = new ArrayList<>(opened.warnings());
-            warnings.addAll(Plausibility.doubts(ranges));
-            warnings.addAll(PorosityDoubts.of(aquifer, opened.solutes(), progress));
-            warnings.addAll(HeadDoubts.of(aquifer));
-            warnings.addAll(words.warningsOfSet(List.of(record)));
-            List<String> notes = new ArrayList<>(opened.notes());
-            notes.addAll(words.remarks(WellRule.POINT));
-            return new InspectionText(opened, ranges, balance, record).write(warnings, notes);
+            return text(opened, threads, progress);
         }
+    }
+
+    /**
+     * Inspects a set that is open.
+     *
+     * @param opened the set
+     * @param threads how many threads may work
+     * @param progress told how far the work is
+     * @return the report, lines of text
+     * @throws org.seepledger.fault.DataFault if something is wrong with its values
+     */
+    static String text(AquiferFolder opened, int threads, Progress progress) {
+        Aquifer aquifer = opened.aquifer();
+        List<ValueRange> ranges = Survey.of(aquifer, opened.quantities(), progress);
+        Prism whole = whole(aquifer);
+        Balance balance = WaterBalance.of(aquifer, List.of(whole), WellRule.POINT, threads, progress);
+        PeriodBudget record = balance.ledgers().get(0).budget(new Periods(aquifer.times()).record());
+        RunWarnings words = new RunWarnings(aquifer, balance.notes());
+        List<String> warnings = new ArrayList<>(opened.warnings());
+        warnings.addAll(Plausibility.doubts(ranges));
+        warnings.addAll(PorosityDoubts.of(aquifer, opened.solutes(), progress));
+        warnings.addAll(HeadDoubts.of(aquifer));
+        warnings.addAll(words.warningsOfSet(List.of(record)));
+        List<String> notes = new ArrayList<>(opened.notes());
+        notes.addAll(words.remarks(WellRule.POINT));
+        return new InspectionText(opened, ranges, balance, record).write(warnings, notes);
     }
 
     /** The grid as a prism, from its south-western corner counter-clockwise. */

@@ -67,8 +67,17 @@ final class OutputFolder implements AutoCloseable {
         }
     }
 
+    /**
+     * Makes sure that a folder is a new or empty one, or holds an earlier run that may be replaced.
+     *
+     * @throws UsageFault if not
+     */
+    static void mustBeUsable(Path target, String command, boolean overwrite) {
+        replaceable(target, command, overwrite);
+    }
+
     /** The folders above the target that do not exist yet, the innermost first. */
-    private static List<Path> missing(Path parent) {
+    static List<Path> missing(Path parent) {
         List<Path> missing = new ArrayList<>();
         for (Path folder = parent; folder != null && Files.notExists(folder); folder = folder.getParent()) {
             missing.add(folder);
@@ -76,7 +85,8 @@ final class OutputFolder implements AutoCloseable {
         return missing;
     }
 
-    private static void removeEmpty(List<Path> folders) {
+    /** Removes folders, in their order, as far as they are empty. */
+    static void removeEmpty(List<Path> folders) {
         try {
             for (Path folder : folders) {
                 Files.deleteIfExists(folder);

@@ -49,6 +49,29 @@ public record PlumeRequest(
         boolean overwrite,
         ReportRequest report) {
 
+    /** The same request with its results in another folder. */
+    PlumeRequest into(Path folder) {
+        return new PlumeRequest(
+                aquifer,
+                prisms,
+                folder,
+                every,
+                periods,
+                waterYearStart,
+                rateUnit,
+                massUnit,
+                volumeUnit,
+                wells,
+                dispersion,
+                above,
+                transects,
+                panels,
+                clip,
+                threads,
+                overwrite,
+                report);
+    }
+
     /**
      * A concentration with its unit.
      *

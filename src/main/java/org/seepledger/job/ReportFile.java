@@ -2,6 +2,7 @@ package org.seepledger.job;
 
 import java.io.IOException;
 import java.nio.file.Files;
+import java.nio.file.Path;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -82,8 +83,8 @@ final class ReportFile {
         return options;
     }
 
-    /** Writes the report on a water budget. */
-    void write(
+    /** Writes the report on a water budget; gives its pictures of each prism. */
+    List<PrismPictures> write(
             OutputFolder out,
             Subject subject,
             Balance balance,
@@ -108,7 +109,9 @@ final class ReportFile {
                 tables,
                 pictures,
                 drawing.exchange(results.get(0).record().period()));
-        Files.writeString(out.file(NAME), ReportPage.of(report));
+        Path file = out.file(NAME);
+        Files.writeString(file, ReportPage.of(report));
+        return pictures;
     }
 
     /** Writes the report on solutes. */

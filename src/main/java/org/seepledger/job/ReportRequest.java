@@ -25,6 +25,12 @@ public record ReportRequest(
         List<String> periods,
         Amounts amounts) {
 
+    /** How many letters a line of it may have. */
+    public static final int LONGEST = 200;
+
+    /** How many lines a letterhead may have. */
+    public static final int MOST_LINES = 8;
+
     /** The whole record. */
     public static final String RECORD = "record";
 

@@ -103,6 +103,12 @@ public final class Workbench implements AutoCloseable {
         return folder.origins();
     }
 
+    /** {@return whether concentrations of a solute are given, so that its budget can be struck} */
+    public boolean hasSolutes() {
+        return folder.solutes().stream()
+                .anyMatch(solute -> solute.concentration().isPresent());
+    }
+
     /**
      * {@return the periods of its record}
      *
@@ -178,6 +184,11 @@ public final class Workbench implements AutoCloseable {
      */
     public void write(Path file, Drawing drawing) {
         DrawingWriter.write(file, crs().name(), drawing);
+    }
+
+    /** The set's folder, for what stands beside its description. */
+    DataFolder besides() {
+        return DataFolder.holding(folder.inputs().get(AquiferReader.FILE), AquiferReader.FILE);
     }
 
     private PrismsReader reader(Consumer<String> notes) {

@@ -1,38 +1,38 @@
 package org.seepledger.plume;
 
 import org.seepledger.balance.Bookings;
-import org.seepledger.balance.Tally;
 import org.seepledger.fault.DataFault;
 
 /** Books what disperses through the faces of a prism, in one band and interval. */
 final class DispersedBookings implements Bookings {
 
     private final SoluteChart chart;
-    private final Tally tally;
+    private final Bookings flows;
     private final String solute;
     private int row;
     private int column;
 
-    DispersedBookings(SoluteChart chart, Tally tally, String solute) {
+    DispersedBookings(SoluteChart chart, Bookings flows, String solute) {
         this.chart = chart;
-        this.tally = tally;
+        this.flows = flows;
         this.solute = solute;
     }
 
     @Override
     public void at(int cellRow, int cellColumn) {
+        flows.at(cellRow, cellColumn);
         row = cellRow;
         column = cellColumn;
     }
 
     @Override
     public void throughPiece(int account, double start, double end) {
-        tally.throughPiece(chart.dispersion(account), known(start), known(end));
+        flows.throughPiece(chart.dispersion(account), known(start), known(end));
     }
 
     @Override
     public void throughFace(int account, double out) {
-        tally.throughFace(chart.dispersion(account), known(out));
+        flows.throughFace(chart.dispersion(account), known(out));
     }
 
     private double known(double flow) {

@@ -2,10 +2,16 @@ package org.seepledger.plume;
 
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import java.util.function.ToDoubleFunction;
+import java.util.stream.IntStream;
 import org.seepledger.aquifer.Solute;
 import org.seepledger.aquifer.Times;
+import org.seepledger.ledger.Account;
+import org.seepledger.ledger.Entry;
+import org.seepledger.ledger.Group;
 import org.seepledger.ledger.Ledger;
+import org.seepledger.ledger.Period;
 
 /**
  * What one prism holds of one solute, and its budget.
@@ -14,6 +20,8 @@ import org.seepledger.ledger.Ledger;
  * @param solute the solute
  * @param firstLayer the first layer of the prism's range, from 0
  * @param ledgers the budget in kilograms for each way to count non-detects; {@link NonDetects#HALF} is the one to show
+ * @param alongCells what faces and sources would carry if mass flow were interpolated within cells as the water's is,
+ *     non-detects counted half their limit; other accounts are empty
  * @param stocks what is held: by instant and layer of the range, the last for all layers together
  * @param doubts what makes numbers doubtful
  */
@@ -22,8 +30,11 @@ public record Plume(
         Solute solute,
         int firstLayer,
         Map<NonDetects, Ledger> ledgers,
+        Ledger alongCells,
         List<List<Stock>> stocks,
         Doubts doubts) {
+
+    private static final Set<Group> CARRIED = Set.of(Group.SIDE, Group.LID, Group.SOURCE);
 
     /** Copies the collections. */
     public Plume {
@@ -34,6 +45,25 @@ public record Plume(
     /** {@return the budget to show} */
     public Ledger ledger() {
         return ledgers.get(NonDetects.HALF);
+    }
+
+    /**
+     * {@return what sides, lids and sources that cut cells add to a period's residual, by account, kg: a cell's own
+     * concentration counts all through it there, while its balance is kept on its faces}
+     *
+     * @param period the period
+     */
+    public double[] cutting(Period period) {
+        List<Entry> booked = ledger().budget(period).entries();
+        List<Entry> along = alongCells.budget(period).entries();
+        return IntStream.range(0, booked.size())
+                .mapToDouble(i -> {
+                    Account account = booked.get(i).account();
+                    return account.quantified() && CARRIED.contains(account.group())
+                            ? booked.get(i).net() - along.get(i).net()
+                            : 0;
+                })
+                .toArray();
     }
 
     /**

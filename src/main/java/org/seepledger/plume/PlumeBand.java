@@ -2,21 +2,15 @@ package org.seepledger.plume;
 
 import java.util.ArrayList;
 import java.util.HashMap;
-import java.util.IdentityHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.stream.Stream;
-import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.Block;
 import org.seepledger.aquifer.CellGeometry;
 import org.seepledger.aquifer.GriddedValues;
 import org.seepledger.aquifer.IntervalState;
 import org.seepledger.aquifer.PlacedWell;
 import org.seepledger.aquifer.Solute;
-import org.seepledger.aquifer.Source;
-import org.seepledger.aquifer.Well;
-import org.seepledger.aquifer.WellRate;
 import org.seepledger.aquifer.Window;
 import org.seepledger.balance.PrismWalk;
 import org.seepledger.balance.Span;
@@ -31,8 +25,7 @@ final class PlumeBand {
     private final List<PrismWalk> walks;
     private final List<List<SoluteChart>> charts;
     private final List<PlacedWell> wells;
-    private final List<Integer> terms = new ArrayList<>();
-    private final Map<Well, Integer> sourceOfWell = new IdentityHashMap<>();
+    private final Givers givers;
 
     PlumeBand(
             SoluteBalance.Scope scope,
@@ -49,16 +42,7 @@ final class PlumeBand {
         this.wells = wells.stream()
                 .filter(well -> window.contains(well.row(), well.column()))
                 .toList();
-        Aquifer aquifer = scope.aquifer();
-        for (int i = 0; i < aquifer.sources().size(); i++) {
-            if (aquifer.sources().get(i) instanceof Source.Points points) {
-                for (Well well : points.wells()) {
-                    sourceOfWell.put(well, i);
-                }
-            } else {
-                terms.add(i);
-            }
-        }
+        this.givers = new Givers(scope.aquifer());
     }
 
     PlumeSums work(Progress progress) {
@@ -124,17 +108,13 @@ final class PlumeBand {
     private List<Optional<double[]>> carried(Solute solute, int interval, IntervalState state) {
         Map<Integer, double[]> bySource = new HashMap<>();
         List<Optional<double[]>> carried = new ArrayList<>();
-        Stream<Integer> givers = Stream.concat(
-                terms.stream(), state.terms().stream().skip(terms.size()).map(term -> -1));
-        Stream<Integer> wellGivers =
-                state.wells().stream().map(WellRate::well).map(well -> sourceOfWell.get(well.well()));
-        Stream.concat(givers, wellGivers).forEach(source -> {
+        for (int source : givers.of(state)) {
             GriddedValues given = solute.ofSources().get(source);
             carried.add(
                     given == null
                             ? Optional.empty()
                             : Optional.of(bySource.computeIfAbsent(source, key -> read(given, interval, state))));
-        });
+        }
         return carried;
     }
 
@@ -149,6 +129,7 @@ final class PlumeBand {
                 ? known.matrix().solute().dispersion().map(given -> new DispersiveFaces(state, known.matrix(), given))
                 : Optional.empty();
         double length = scope.aquifer().times().length(interval);
+        IntervalState field = CarriedField.of(state, known);
         for (int prism = 0; prism < walks.size(); prism++) {
             SoluteTally tally = sums.tally(interval, prism, solute);
             SoluteChart chart = charts.get(prism).get(solute);
@@ -159,6 +140,7 @@ final class PlumeBand {
             SoluteBookings bookings = new SoluteBookings(chart, state, known, tally, length, counting);
             overBand.get(prism).book(state, bookings);
             bookings.finish();
+            overBand.get(prism).book(field, new AlongCells(field, tally.alongCells()));
         }
         spreading.ifPresent(faces -> bookSpreading(faces, interval, state, overBand, solute, known, sums));
     }

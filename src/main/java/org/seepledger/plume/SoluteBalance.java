@@ -18,6 +18,7 @@ import org.seepledger.aquifer.Window;
 import org.seepledger.balance.Bands;
 import org.seepledger.balance.PrismWalk;
 import org.seepledger.balance.Span;
+import org.seepledger.balance.Tally;
 import org.seepledger.balance.WellRule;
 import org.seepledger.fault.DataFault;
 import org.seepledger.ledger.Ledger;
@@ -170,8 +171,11 @@ public final class SoluteBalance {
     private Plume plume(PlumeSums total, int prism, int solute, SoluteChart chart) {
         Map<NonDetects, Ledger> ledgers = new EnumMap<>(NonDetects.class);
         for (NonDetects choice : NonDetects.values()) {
-            ledgers.put(choice, ledger(total, prism, solute, chart, choice));
+            ledgers.put(
+                    choice,
+                    ledger(total, prism, solute, chart, tally -> tally.flows().get(choice.ordinal())));
         }
+        Ledger alongCells = ledger(total, prism, solute, chart, SoluteTally::alongCells);
         PrismWalk walk = walks.get(prism);
         int from = scope.span().from();
         List<List<Stock>> stocks = IntStream.rangeClosed(
@@ -184,7 +188,7 @@ public final class SoluteBalance {
             stocks.set(interval + 1, total.tally(interval, prism, solute).end());
             doubts.add(total.tally(interval, prism, solute).doubts());
         }
-        return new Plume(name(prism), solutes.get(solute), walk.firstLayer(), ledgers, stocks, doubts);
+        return new Plume(name(prism), solutes.get(solute), walk.firstLayer(), ledgers, alongCells, stocks, doubts);
     }
 
     private String name(int prism) {
@@ -197,7 +201,8 @@ public final class SoluteBalance {
                 .toList();
     }
 
-    private Ledger ledger(PlumeSums total, int prism, int solute, SoluteChart chart, NonDetects choice) {
+    private Ledger ledger(
+            PlumeSums total, int prism, int solute, SoluteChart chart, Function<SoluteTally, Tally> which) {
         int intervals = scope.aquifer().times().intervals();
         double[][] inflow = new double[intervals][];
         double[][] outflow = new double[intervals][];
@@ -206,9 +211,9 @@ public final class SoluteBalance {
         Arrays.fill(inflow, none);
         Arrays.fill(outflow, none);
         for (int interval = scope.span().from(); interval < scope.span().to(); interval++) {
-            SoluteTally tally = total.tally(interval, prism, solute);
-            inflow[interval] = tally.flows().get(choice.ordinal()).inflow();
-            outflow[interval] = tally.flows().get(choice.ordinal()).outflow();
+            Tally tally = which.apply(total.tally(interval, prism, solute));
+            inflow[interval] = tally.inflow();
+            outflow[interval] = tally.outflow();
         }
         return new Ledger(name(prism), chart.accounts(), isStorageKnown(), inflow, outflow);
     }

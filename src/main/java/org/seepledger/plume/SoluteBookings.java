@@ -1,5 +1,6 @@
 package org.seepledger.plume;
 
+import java.util.List;
 import org.seepledger.aquifer.CellGeometry;
 import org.seepledger.aquifer.CellTerm;
 import org.seepledger.aquifer.Grid;
@@ -17,6 +18,7 @@ final class SoluteBookings implements Bookings {
     private final SoluteChart chart;
     private final IntervalState state;
     private final SoluteState solute;
+    private final List<? extends Bookings> flows;
     private final SoluteTally tally;
     private final double length;
     private final Counting counting;
@@ -50,6 +52,19 @@ final class SoluteBookings implements Bookings {
             SoluteTally tally,
             double length,
             Counting counting) {
+        this(chart, state, solute, tally.flows(), tally, length, counting);
+    }
+
+    /** Books flows elsewhere than in a tally, for each way to count non-detects. */
+    SoluteBookings(
+            SoluteChart chart,
+            IntervalState state,
+            SoluteState solute,
+            List<? extends Bookings> flows,
+            SoluteTally tally,
+            double length,
+            Counting counting) {
+        this.flows = flows;
         this.chart = chart;
         this.state = state;
         this.solute = solute;
@@ -60,6 +75,8 @@ final class SoluteBookings implements Bookings {
 
     @Override
     public void at(int cellRow, int cellColumn) {
+        finish();
+        flows.forEach(sink -> sink.at(cellRow, cellColumn));
         row = cellRow;
         column = cellColumn;
         aboveInColumn = false;
@@ -78,7 +95,7 @@ final class SoluteBookings implements Bookings {
             boolean out = start + end >= 0;
             for (int choice = 0; choice < CHOICES; choice++) {
                 double carried = upstream(choice, out);
-                tally.flows().get(choice).throughPiece(account, carried * start, carried * end);
+                flows.get(choice).throughPiece(account, carried * start, carried * end);
             }
         }
     }
@@ -87,7 +104,7 @@ final class SoluteBookings implements Bookings {
     public void throughFace(int account, double out) {
         if (out != 0) {
             for (int choice = 0; choice < CHOICES; choice++) {
-                tally.flows().get(choice).throughFace(account, upstream(choice, out > 0) * out);
+                flows.get(choice).throughFace(account, upstream(choice, out > 0) * out);
             }
         }
     }
@@ -121,7 +138,7 @@ final class SoluteBookings implements Bookings {
             double carried = rate < 0
                     ? solute.mean().needed(choice, adder)
                     : solute.carried().get(giver).map(values -> values[adder]).orElse(0.0);
-            tally.flows().get(choice).added(account, (Double.isNaN(carried) ? 0 : carried) * rate);
+            flows.get(choice).added(account, (Double.isNaN(carried) ? 0 : carried) * rate);
         }
     }
 
@@ -131,7 +148,7 @@ final class SoluteBookings implements Bookings {
             if (term.entry() == CellTerm.Entry.WHERE_IT_PASSES) {
                 held[choice] -= mass;
             } else {
-                tally.flows().get(choice).added(chart.elastic(layer), mass);
+                flows.get(choice).added(chart.elastic(layer), mass);
             }
         }
         if (term.entry() == CellTerm.Entry.WHERE_IT_PASSES) {
@@ -188,16 +205,16 @@ final class SoluteBookings implements Bookings {
     private void bookRock(int choice, int cell, double before, double after) {
         double change =
                 mass(solute, solute.end(), choice, cell, after) - mass(solute, solute.start(), choice, cell, before);
-        tally.flows().get(choice).added(chart.massChange(layer), -change / length);
+        flows.get(choice).added(chart.massChange(layer), -change / length);
         held[choice] = mass(solute, solute.mean(), choice, cell, before - after) / length;
         double decays = decay(solute, choice, cell, before, after);
         if (decays != 0) {
-            tally.flows().get(choice).added(chart.decay(layer), -decays);
+            flows.get(choice).added(chart.decay(layer), -decays);
         }
         solute.parent().ifPresent(parent -> {
             double produced = solute.matrix().yield(cell) * decay(parent, choice, cell, before, after);
             if (produced != 0) {
-                tally.flows().get(choice).added(chart.production(layer), produced);
+                flows.get(choice).added(chart.production(layer), produced);
             }
         });
     }
@@ -238,7 +255,7 @@ final class SoluteBookings implements Bookings {
         }
         for (int choice = 0; choice < CHOICES; choice++) {
             if (held[choice] != 0) {
-                tally.flows().get(choice).added(chart.held(heldIn), -held[choice]);
+                flows.get(choice).added(chart.held(heldIn), -held[choice]);
             }
         }
         if (Math.abs(drained) > Math.abs(poresDrained) * (1 + ROUNDING)) {

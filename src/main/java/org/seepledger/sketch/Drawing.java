@@ -3,6 +3,7 @@ package org.seepledger.sketch;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -10,6 +11,7 @@ import java.util.Set;
 import java.util.function.Consumer;
 import java.util.function.Predicate;
 import java.util.function.UnaryOperator;
+import java.util.stream.Collectors;
 
 /**
  * The prisms that a person has drawn, in their order, and the transects. Every edit is a new drawing; what it leaves alone is
@@ -101,6 +103,13 @@ public record Drawing(List<Shape> shapes, List<ControlLine> lines) {
         return withLines(lines.stream()
                 .map(line -> line.name().equals(name) ? change.apply(line) : line)
                 .toList());
+    }
+
+    /** {@return the surfaces that its shapes name, each once} */
+    public Set<Limit.Surface> surfaces() {
+        return shapes.stream()
+                .flatMap(shape -> shape.reach().surfaces().stream())
+                .collect(Collectors.toCollection(LinkedHashSet::new));
     }
 
     /**

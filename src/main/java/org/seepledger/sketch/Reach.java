@@ -1,6 +1,8 @@
 package org.seepledger.sketch;
 
+import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 import org.seepledger.aquifer.GriddedValues;
 import org.seepledger.prism.VerticalRange;
 
@@ -67,6 +69,17 @@ public sealed interface Reach {
             return new VerticalRange.Layers(stack.first(), stack.last());
         }
         return new VerticalRange.Layers(0, layers - 1);
+    }
+
+    /** {@return the surfaces that it names} */
+    default List<Limit.Surface> surfaces() {
+        return this instanceof Between between
+                ? Stream.of(between.top(), between.bottom())
+                        .flatMap(Optional::stream)
+                        .filter(Limit.Surface.class::isInstance)
+                        .map(Limit.Surface.class::cast)
+                        .toList()
+                : List.of();
     }
 
     private static GriddedValues values(Limit limit, String lid, Surfaces surfaces) {

@@ -53,8 +53,12 @@ class MapWindowTest {
 
     private Color pixel(double x, double y) {
         Image[] taken = new Image[1];
-        window.robot.interact(() -> taken[0] = canvas().snapshot(null, null));
-        return taken[0].getPixelReader().getColor((int) x, (int) y);
+        Point2D[] place = new Point2D[1];
+        window.robot.interact(() -> {
+            place[0] = canvas().localToScene(x, y);
+            taken[0] = window.assembly().scene().snapshot(null);
+        });
+        return taken[0].getPixelReader().getColor((int) place[0].getX(), (int) place[0].getY());
     }
 
     private static Color colour(ValueScale scale, double value) {
@@ -85,11 +89,11 @@ class MapWindowTest {
         });
         window.settle();
         Camera camera = camera();
-        double x = Math.floor(camera.width() / 2 + (502625 - camera.centreX()) * camera.scale());
+        double x = Math.floor(camera.width() / 2 + (500275 - camera.centreX()) * camera.scale());
         double y = Math.floor(camera.height() / 2 - (5200275 - camera.centreY()) * camera.scale());
         double[] head = new double[1];
         var set = window.assembly().session().set().get().orElseThrow();
-        set.aquifer().head().orElseThrow().read(0, 1, new org.seepledger.aquifer.Window(42, 52, 1, 1), head, 0);
+        set.aquifer().head().orElseThrow().read(0, 1, new org.seepledger.aquifer.Window(42, 5, 1, 1), head, 0);
         Color expected = colour(window.assembly().map().values().scale().get().orElseThrow(), head[0]);
         Color found = pixel(x, y);
         assertThat(found.getRed()).isCloseTo(expected.getRed(), within(0.02));

@@ -49,7 +49,7 @@ public final class OpenWindow implements AutoCloseable {
             stage = FxToolkit.registerPrimaryStage();
             FxToolkit.setupFixture(() -> {
                 assembly = new Assembly(
-                        new Assembly.Outside(tasks, answers, answers, answers, answers), List.of(Path.of("")));
+                        new Assembly.Outside(tasks, answers, answers, answers, answers, answers), List.of(Path.of("")));
                 stage.setScene(assembly.scene());
                 stage.setX(0);
                 stage.setY(0);
@@ -80,7 +80,7 @@ public final class OpenWindow implements AutoCloseable {
     }
 
     /** Chooses a value from a choice box, by click and keys. */
-    <T> void choose(String selector, T value) {
+    public <T> void choose(String selector, T value) {
         @SuppressWarnings("unchecked")
         ChoiceBox<T> box = robot.lookup(selector).queryAs(ChoiceBox.class);
         robot.clickOn(box);
@@ -115,7 +115,7 @@ public final class OpenWindow implements AutoCloseable {
     }
 
     /** Lets the window come to rest. */
-    void settle() {
+    public void settle() {
         WaitForAsyncUtils.sleep(350, TimeUnit.MILLISECONDS);
         WaitForAsyncUtils.waitForFxEvents();
     }

@@ -1,12 +1,18 @@
 package org.seepledger.desktop;
 
+import java.lang.management.ManagementFactory;
+import java.lang.management.ThreadMXBean;
 import java.nio.file.Path;
 import java.util.concurrent.TimeUnit;
 import javafx.animation.AnimationTimer;
 import org.seepledger.job.MapQuantity;
 import org.testfx.util.WaitForAsyncUtils;
 
-/** Measures how long a frame takes while a large layer is panned and zoomed: the folder is the argument. */
+/**
+ * Measures what a frame costs while a large layer is panned and zoomed: the folder is the argument. Frames in a second
+ * depend on what else the machine does, so the time that the window's own thread and the painting thread work on each is
+ * printed beside them.
+ */
 public final class PanSpeed {
 
     private static final int SECONDS = 3;
@@ -65,10 +71,25 @@ public final class PanSpeed {
             }
         };
         long begin = System.nanoTime();
+        double thinking = work("JavaFX Application Thread") + work("Event Thread");
+        double painting = work("QuantumRenderer-0");
         window.robot.interact(timer::start);
         WaitForAsyncUtils.sleep(SECONDS, TimeUnit.SECONDS);
         window.robot.interact(timer::stop);
         double seconds = (System.nanoTime() - begin) / 1e9;
-        System.out.printf("%s: %.0f frames a second%n", what, frames[0] / seconds);
+        thinking = work("JavaFX Application Thread") + work("Event Thread") - thinking;
+        painting = work("QuantumRenderer-0") - painting;
+        System.out.printf(
+                "%s: %.0f frames a second, each %.1f ms of the window's thread and %.1f ms of painting%n",
+                what, frames[0] / seconds, thinking / frames[0], painting / frames[0]);
+    }
+
+    /** The milliseconds that a thread has worked. */
+    private static double work(String name) {
+        ThreadMXBean threads = ManagementFactory.getThreadMXBean();
+        return Thread.getAllStackTraces().keySet().stream()
+                .filter(thread -> thread.getName().equals(name))
+                .mapToDouble(thread -> threads.getThreadCpuTime(thread.getId()) / 1e6)
+                .sum();
     }
 }

@@ -2,30 +2,21 @@ package org.seepledger.sample;
 
 import java.util.ArrayList;
 import java.util.List;
-import org.apache.commons.math3.linear.Array2DRowRealMatrix;
-import org.apache.commons.math3.linear.ArrayRealVector;
-import org.apache.commons.math3.linear.DecompositionSolver;
-import org.apache.commons.math3.linear.LUDecomposition;
 
 /**
- * A solvent that leaks for a year, and what becomes of it: advection with the concentration upstream, dispersion with the full
- * tensor, linear sorption, decay into a product. An interval's flows carry the mean of its two ends, as budgets do.
+ * A solvent that seeps down for a year, and what becomes of it: advection with the concentration upstream, dispersion with the
+ * full tensor, linear sorption, decay into a product, in gravel whose water table rises and falls. A month's flows carry
+ * the mean of its two ends, as budgets do.
  *
  * <p>Concentrations in g/m³ (mg/L), cell = row from the south × columns + column.
  */
 final class DepotPlume {
 
-    static final int INTERVALS = 12;
-    static final double INTERVAL = 60.875;
-    static final double POROSITY = 0.25;
+    static final int INTERVALS = ValleySeasons.MONTHS;
+    static final double POROSITY = 0.28;
 
     /** kg/m³. */
     static final double BULK_DENSITY = 1700;
-
-    /** m. */
-    static final double LONGITUDINAL = 6;
-
-    static final double TRANSVERSE = 0.6;
 
     /** Mass of the product for each mass of the solvent that decays. */
     static final double YIELD = 0.74;
@@ -35,152 +26,70 @@ final class DepotPlume {
 
     static final double[] HALF_LIFE = {500, 900};
 
-    private static final int CELLS = DepotFlow.COLUMNS * DepotFlow.ROWS;
-    private static final double VOLUME = DepotFlow.CELL * DepotFlow.CELL * DepotFlow.THICKNESS;
+    /** The first of the two by two cells whose recharge the solvent seeps down with. */
+    static final int SPILL_COLUMN = 4;
 
-    private DepotPlume() {}
+    static final int SPILL_ROW = 6;
+    static final int SPILL_WIDTH = 2;
 
-    /** What the leak carries of the solvent in an interval, g/m³. */
-    static double leaked(int interval) {
-        return interval < INTERVALS / 2 ? 900 : 0;
+    private static final double DAYS_A_YEAR = 365.25;
+
+    private final DepotFlow flow;
+
+    DepotPlume(DepotFlow flow) {
+        this.flow = flow;
+    }
+
+    /** What recharge carries of the solvent through the spoiled ground in a month, g/m³. */
+    static double seeping(int interval) {
+        return interval < INTERVALS / 2 ? 850 : 0;
+    }
+
+    static boolean isSpoiled(int column, int row) {
+        return column >= SPILL_COLUMN
+                && column < SPILL_COLUMN + SPILL_WIDTH
+                && row >= SPILL_ROW
+                && row < SPILL_ROW + SPILL_WIDTH;
     }
 
     /** {@return concentrations at the instants: of the solvent, then of its product} */
-    static List<List<double[]>> solved() {
-        double[] none = new double[CELLS];
-        List<double[]> solvent = new ArrayList<>(List.of(none));
-        List<double[]> product = new ArrayList<>(List.of(none));
-        Step ofSolvent = new Step(0);
-        Step ofProduct = new Step(1);
+    List<List<double[]>> solved() {
+        List<double[]> solvent = new ArrayList<>(List.of(new double[DepotFlow.CELLS]));
+        List<double[]> product = new ArrayList<>(List.of(new double[DepotFlow.CELLS]));
         for (int interval = 0; interval < INTERVALS; interval++) {
-            double[] added = new double[CELLS];
-            added[DepotFlow.LEAK_ROW * DepotFlow.COLUMNS + DepotFlow.LEAK_COLUMN] = DepotFlow.LEAK * leaked(interval);
+            DepotMonth month = new DepotMonth(flow, interval);
             double[] before = solvent.get(interval);
-            double[] after = ofSolvent.from(before, added);
-            double[] produced = new double[CELLS];
-            for (int cell = 0; cell < CELLS; cell++) {
-                produced[cell] = YIELD * ofSolvent.decay * ofSolvent.capacity * 0.5 * (before[cell] + after[cell]);
+            double[] after = month.step(capacity(0), decay(0), before, seeped(interval));
+            double[] produced = month.decayed(capacity(0), decay(0), before, after);
+            for (int cell = 0; cell < produced.length; cell++) {
+                produced[cell] *= YIELD;
             }
             solvent.add(after);
-            product.add(ofProduct.from(product.get(interval), produced));
+            product.add(month.step(capacity(1), decay(1), product.get(interval), produced));
         }
         return List.of(solvent, product);
     }
 
-    /** One interval of one substance: capacity × growth = added − flow out − decay, both for the mean of the two ends. */
-    private static final class Step {
-
-        private final double capacity;
-        private final double decay;
-        private final Array2DRowRealMatrix leaving = new Array2DRowRealMatrix(CELLS, CELLS);
-        private final DecompositionSolver solver;
-
-        Step(int substance) {
-            capacity = VOLUME * (POROSITY + BULK_DENSITY * KD[substance] * 1e-3);
-            decay = StrictMath.log(2) / HALF_LIFE[substance];
-            for (int cell = 0; cell < CELLS; cell++) {
-                double[] one = new double[CELLS];
-                one[cell] = 1;
-                double[] out = out(one);
-                out[cell] += decay * capacity;
-                leaving.setColumn(cell, out);
-            }
-            Array2DRowRealMatrix matrix = (Array2DRowRealMatrix) leaving.scalarMultiply(0.5);
-            for (int cell = 0; cell < CELLS; cell++) {
-                matrix.addToEntry(cell, cell, capacity / INTERVAL);
-            }
-            solver = new LUDecomposition(matrix).getSolver();
-        }
-
-        double[] from(double[] before, double[] added) {
-            double[] known = leaving.operate(before);
-            for (int cell = 0; cell < CELLS; cell++) {
-                known[cell] = capacity / INTERVAL * before[cell] - 0.5 * known[cell] + added[cell];
-            }
-            return solver.solve(new ArrayRealVector(known)).toArray();
-        }
+    /** Mass in a volume of full rock for each mass in a volume of water. */
+    private static double capacity(int substance) {
+        return POROSITY + BULK_DENSITY * KD[substance] * 1e-3;
     }
 
-    /** What leaves each cell through its faces; clean water comes from beyond the grid. */
-    private static double[] out(double[] c) {
-        double[] out = new double[CELLS];
+    /** 1/d. */
+    private static double decay(int substance) {
+        return StrictMath.log(2) / HALF_LIFE[substance];
+    }
+
+    /** g/d. */
+    private double[] seeped(int interval) {
+        double[] added = new double[DepotFlow.CELLS];
         for (int row = 0; row < DepotFlow.ROWS; row++) {
-            for (int column = 0; column <= DepotFlow.COLUMNS; column++) {
-                double flow = DepotFlow.east(column, row);
-                move(out, c, column - 1, row, column, row, flow, dispersed(c, column, row, true));
-            }
-        }
-        for (int row = 0; row <= DepotFlow.ROWS; row++) {
             for (int column = 0; column < DepotFlow.COLUMNS; column++) {
-                double flow = DepotFlow.north(column, row);
-                move(out, c, column, row - 1, column, row, flow, dispersed(c, column, row, false));
+                double water =
+                        flow.recharge(interval, column, row) / 1000.0 / DAYS_A_YEAR * DepotFlow.CELL * DepotFlow.CELL;
+                added[row * DepotFlow.COLUMNS + column] = isSpoiled(column, row) ? water * seeping(interval) : 0;
             }
         }
-        return out;
-    }
-
-    private static void move(
-            double[] out, double[] c, int column, int row, int toColumn, int toRow, double flow, double dispersed) {
-        double upstream = flow >= 0 ? at(c, column, row) : at(c, toColumn, toRow);
-        double moved = flow * upstream + dispersed;
-        if (isInside(column, row)) {
-            out[row * DepotFlow.COLUMNS + column] += moved;
-        }
-        if (isInside(toColumn, toRow)) {
-            out[toRow * DepotFlow.COLUMNS + toColumn] -= moved;
-        }
-    }
-
-    /** What disperses eastward through a cell's west face, or northward through its south face. */
-    private static double dispersed(double[] c, int column, int row, boolean eastward) {
-        int firstColumn = eastward ? column - 1 : column;
-        int firstRow = eastward ? row : row - 1;
-        if (!isInside(firstColumn, firstRow) || !isInside(column, row)) {
-            return 0;
-        }
-        double face = DepotFlow.CELL * DepotFlow.THICKNESS;
-        double qx = eastward ? DepotFlow.east(column, row) / face : across(firstColumn, firstRow, column, row, true);
-        double qy = eastward ? across(firstColumn, firstRow, column, row, false) : DepotFlow.north(column, row) / face;
-        double size = Math.sqrt(qx * qx + qy * qy);
-        double step = (at(c, column, row) - at(c, firstColumn, firstRow)) / DepotFlow.CELL;
-        double aside = 0.5 * (slope(c, firstColumn, firstRow, !eastward) + slope(c, column, row, !eastward));
-        double along = eastward ? qx : qy;
-        double lateral = eastward ? qy : qx;
-        double straight = (LONGITUDINAL * along * along + TRANSVERSE * lateral * lateral) / size;
-        double crossed = (LONGITUDINAL - TRANSVERSE) * qx * qy / size;
-        return -face * (straight * step + crossed * aside);
-    }
-
-    /** The mean discharge of two cells along one axis. */
-    private static double across(int column, int row, int otherColumn, int otherRow, boolean eastward) {
-        double face = DepotFlow.CELL * DepotFlow.THICKNESS;
-        double sum = eastward
-                ? DepotFlow.east(column, row)
-                        + DepotFlow.east(column + 1, row)
-                        + DepotFlow.east(otherColumn, otherRow)
-                        + DepotFlow.east(otherColumn + 1, otherRow)
-                : DepotFlow.north(column, row)
-                        + DepotFlow.north(column, row + 1)
-                        + DepotFlow.north(otherColumn, otherRow)
-                        + DepotFlow.north(otherColumn, otherRow + 1);
-        return 0.25 * sum / face;
-    }
-
-    /** The slope in a cell along one axis: between its neighbours, or to the one that there is. */
-    private static double slope(double[] c, int column, int row, boolean eastward) {
-        int beforeColumn = Math.max(0, eastward ? column - 1 : column);
-        int beforeRow = Math.max(0, eastward ? row : row - 1);
-        int afterColumn = Math.min(DepotFlow.COLUMNS - 1, eastward ? column + 1 : column);
-        int afterRow = Math.min(DepotFlow.ROWS - 1, eastward ? row : row + 1);
-        double distance = DepotFlow.CELL * (afterColumn - beforeColumn + afterRow - beforeRow);
-        return (at(c, afterColumn, afterRow) - at(c, beforeColumn, beforeRow)) / distance;
-    }
-
-    private static double at(double[] c, int column, int row) {
-        return isInside(column, row) ? c[row * DepotFlow.COLUMNS + column] : 0;
-    }
-
-    private static boolean isInside(int column, int row) {
-        return column >= 0 && row >= 0 && column < DepotFlow.COLUMNS && row < DepotFlow.ROWS;
+        return added;
     }
 }

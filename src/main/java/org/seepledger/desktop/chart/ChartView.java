@@ -37,6 +37,7 @@ public final class ChartView extends BorderPane {
         this.model = model;
         this.picture = new PictureView((PictureView.ForSize) this::draw, theme);
         setId("chart");
+        getStyleClass().add("sl-pane");
         picture.setId("chart-picture");
         picture.setCursor(Cursor.HAND);
         picture.setOnMousePressed(this::look);

@@ -11,6 +11,7 @@ import javafx.beans.property.ReadOnlyLongWrapper;
 import javafx.beans.property.SimpleObjectProperty;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.GriddedValues;
+import org.seepledger.desktop.session.DrawnShapes;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.session.Transects;
 import org.seepledger.desktop.words.Words;
@@ -93,6 +94,7 @@ public final class DraftModel {
                                 .toList(),
                         settled));
         publishLines(settled);
+        tellShapes();
         if (history.current().find(session.selected().get()).isEmpty()) {
             session.selected().set("");
         }
@@ -113,6 +115,10 @@ public final class DraftModel {
     /** {@return the transect that is chosen, if there is one} */
     Optional<ControlLine> selectedLine() {
         return drawing().line(session.transect().get());
+    }
+
+    private void tellShapes() {
+        session.shapes().set(new DrawnShapes(history.settled(), !isUnsaved()));
     }
 
     /**
@@ -261,6 +267,7 @@ public final class DraftModel {
      */
     public void kept(Drawing kept) {
         saved = kept;
+        tellShapes();
         version.set(version.get() + 1);
     }
 

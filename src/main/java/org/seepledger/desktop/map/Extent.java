@@ -23,6 +23,19 @@ record Extent(double west, double south, double east, double north) {
         return over(DoubleStream.of(x), DoubleStream.of(y));
     }
 
+    /** What is seen of a grid, in its own coordinates; of a turned one more than that. */
+    static Extent inGrid(Grid grid, Camera camera) {
+        double[] x = new double[4];
+        double[] y = new double[4];
+        for (int corner = 0; corner < 4; corner++) {
+            double mapX = camera.mapX(corner % 2 * camera.width());
+            double mapY = camera.mapY(corner / 2 * camera.height());
+            x[corner] = grid.localX(mapX, mapY);
+            y[corner] = grid.localY(mapX, mapY);
+        }
+        return over(DoubleStream.of(x), DoubleStream.of(y));
+    }
+
     static Extent of(Prism prism) {
         var sides =
                 prism.rings().stream().flatMap(ring -> ring.sides().stream()).toList();

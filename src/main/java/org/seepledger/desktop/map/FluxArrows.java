@@ -18,15 +18,11 @@ final class FluxArrows {
 
     private FluxArrows() {}
 
-    static List<Mark> of(FluxField field, Grid grid, Camera camera) {
+    static List<Mark> of(Flux flux, Grid grid, Camera camera) {
+        FluxField field = flux.field();
         GridLayer east = field.east();
-        double greatest = 0;
-        for (int i = 0; i < east.values().length; i++) {
-            double size = Math.hypot(east.values()[i], field.north().values()[i]);
-            greatest = Double.isNaN(size) ? greatest : Math.max(greatest, size);
-        }
         List<Mark> marks = new ArrayList<>();
-        for (int row = 0; row < east.rows() && greatest > 0; row++) {
+        for (int row = 0; row < east.rows() && flux.greatest() > 0; row++) {
             for (int column = 0; column < east.columns(); column++) {
                 double alongX = east.at(row, column);
                 double alongY = field.north().at(row, column);
@@ -34,7 +30,8 @@ final class FluxArrows {
                 double x = x(grid, camera, east, row, column);
                 double y = y(grid, camera, east, row, column);
                 if (size > 0 && OnScreen.isNear(x, y, camera)) {
-                    double half = (SHORTEST + (LONGEST - SHORTEST) * Math.sqrt(size / greatest)) / 2;
+                    double share = Math.min(1, size / flux.greatest());
+                    double half = (SHORTEST + (LONGEST - SHORTEST) * Math.sqrt(share)) / 2;
                     double dx = alongX / size * half;
                     double dy = -alongY / size * half;
                     marks.add(new Arrow(x - dx, y - dy, x + dx, y + dy, 1.4)
@@ -55,15 +52,15 @@ final class FluxArrows {
 
     private static double localX(Grid grid, GridLayer layer, int column) {
         Axis axis = grid.x();
-        int from = column * layer.stride();
-        int to = Math.min(axis.count(), from + layer.stride());
+        int from = layer.window().column() + column * layer.stride();
+        int to = Math.min(layer.window().columnEnd(), from + layer.stride());
         return (axis.edge(from) + axis.edge(to)) / 2;
     }
 
     private static double localY(Grid grid, GridLayer layer, int row) {
         Axis axis = grid.y();
-        int from = row * layer.stride();
-        int to = Math.min(axis.count(), from + layer.stride());
+        int from = layer.window().row() + row * layer.stride();
+        int to = Math.min(layer.window().rowEnd(), from + layer.stride());
         return (axis.edge(axis.count() - from) + axis.edge(axis.count() - to)) / 2;
     }
 }

@@ -10,7 +10,6 @@ import javafx.scene.canvas.GraphicsContext;
 import javafx.scene.layout.Region;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.desktop.paint.MarkPainter;
-import org.seepledger.desktop.paint.Paints;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.task.Tasks;
@@ -57,7 +56,7 @@ final class MapCanvas extends Region {
             model.values().view(),
             model.values().scale(),
             model.contours().lines(),
-            model.flux().field(),
+            model.flux().flux(),
             model.overlays().lines(),
             model.overlays().arrows(),
             theme
@@ -120,10 +119,7 @@ final class MapCanvas extends Region {
 
     private void paintGround() {
         GraphicsContext canvas = ground.getGraphicsContext2D();
-        canvas.setFill(Paints.of(Ink.Token.PAPER, 1, theme.getValue()));
-        canvas.fillRect(0, 0, ground.getWidth(), ground.getHeight());
-        canvas.setFill(Paints.of(Ink.Token.GUIDE, 0.35, theme.getValue()));
-        canvas.fillRect(0, 0, ground.getWidth(), ground.getHeight());
+        canvas.clearRect(0, 0, ground.getWidth(), ground.getHeight());
         if (model.session().set().get().isEmpty()) {
             return;
         }
@@ -145,7 +141,7 @@ final class MapCanvas extends Region {
         }
         painter.paint(contours(camera));
         if (model.overlays().arrows().get()) {
-            model.flux().field().get().ifPresent(field -> painter.paint(FluxArrows.of(field, aquifer.grid(), camera)));
+            model.flux().flux().get().ifPresent(flux -> painter.paint(FluxArrows.of(flux, aquifer.grid(), camera)));
         }
     }
 

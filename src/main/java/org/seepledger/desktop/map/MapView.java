@@ -5,6 +5,7 @@ import javafx.beans.value.ObservableValue;
 import javafx.geometry.Insets;
 import javafx.geometry.Pos;
 import javafx.scene.Cursor;
+import javafx.scene.Node;
 import javafx.scene.input.MouseButton;
 import javafx.scene.input.MouseEvent;
 import javafx.scene.input.ScrollEvent;
@@ -55,7 +56,13 @@ public final class MapView extends BorderPane {
         ring.getStyleClass().add("sl-ring");
         ring.setMouseTransparent(true);
         ring.visibleProperty().bind(canvas.focusedProperty());
+        StackPane.setMargin(ring, new Insets(-2));
+        // Kept as pictures, since their shadows would be worked out anew with each move of the map.
+        for (Node afloat : List.of(legend, layers, tray)) {
+            afloat.setCache(true);
+        }
         StackPane stack = new StackPane(canvas, ring, legend, layers, tray);
+        stack.getStyleClass().add("sl-map");
         canvas.invite(hand::marks);
         StackPane.setAlignment(legend, Pos.BOTTOM_RIGHT);
         StackPane.setAlignment(layers, Pos.TOP_LEFT);

@@ -28,7 +28,6 @@ final class TilePainter {
     void paint() {
         canvas.save();
         canvas.setImageSmoothing(false);
-        clip();
         int level = pyramid.levelFor(camera.scale() * outputScale);
         Span seen = seen(level);
         for (int row = seen.firstRow; row <= seen.lastRow; row++) {
@@ -39,53 +38,21 @@ final class TilePainter {
         canvas.restore();
     }
 
-    /** The texels of coarse levels may reach beyond the grid. */
-    private void clip() {
-        double right = grid.x().edge(grid.columns());
-        double top = grid.y().edge(grid.rows());
-        double[][] corners = {{0, 0}, {right, 0}, {right, top}, {0, top}};
-        canvas.beginPath();
-        for (int i = 0; i < corners.length; i++) {
-            double x = snapped(screenX(corners[i][0], corners[i][1]));
-            double y = snapped(screenY(corners[i][0], corners[i][1]));
-            if (i == 0) {
-                canvas.moveTo(x, y);
-            } else {
-                canvas.lineTo(x, y);
-            }
-        }
-        canvas.closePath();
-        canvas.clip();
-    }
-
     /** Which tiles can be seen. */
     private record Span(int firstRow, int lastRow, int firstColumn, int lastColumn) {}
 
     private Span seen(int level) {
-        double west = Double.POSITIVE_INFINITY;
-        double east = Double.NEGATIVE_INFINITY;
-        double south = Double.POSITIVE_INFINITY;
-        double north = Double.NEGATIVE_INFINITY;
-        for (double x : new double[] {0, camera.width()}) {
-            for (double y : new double[] {0, camera.height()}) {
-                double localX = grid.localX(camera.mapX(x), camera.mapY(y));
-                double localY = grid.localY(camera.mapX(x), camera.mapY(y));
-                west = Math.min(west, localX);
-                east = Math.max(east, localX);
-                south = Math.min(south, localY);
-                north = Math.max(north, localY);
-            }
-        }
+        Extent local = Extent.inGrid(grid, camera);
         double tileX = tileX(level);
         double tileY = tileY(level);
         double top = grid.y().edge(grid.rows());
         int lastRow = (pyramid.level(level).rows() - 1) / Pyramid.TILE;
         int lastColumn = (pyramid.level(level).columns() - 1) / Pyramid.TILE;
         return new Span(
-                clamped((top - north) / tileY, lastRow),
-                clamped((top - south) / tileY, lastRow),
-                clamped(west / tileX, lastColumn),
-                clamped(east / tileX, lastColumn));
+                clamped((top - local.north()) / tileY, lastRow),
+                clamped((top - local.south()) / tileY, lastRow),
+                clamped(local.west() / tileX, lastColumn),
+                clamped(local.east() / tileX, lastColumn));
     }
 
     private static int clamped(double place, int last) {
@@ -118,22 +85,29 @@ final class TilePainter {
         double texels = 1 << shift;
         double fromX = wanted.firstColumn() / texels - tile.firstColumn();
         double fromY = wanted.firstRow() / texels - tile.firstRow();
-        double across = Math.min(wanted.columns(pyramid) / texels, image.getWidth() - fromX);
-        double down = Math.min(wanted.rows(pyramid) / texels, image.getHeight() - fromY);
         double stepX = pyramid.lattice().stepX() * (1 << tile.level());
         double stepY = pyramid.lattice().stepY() * (1 << tile.level());
+        double right = grid.x().edge(grid.columns());
         double top = grid.y().edge(grid.rows());
         double localX = (tile.firstColumn() + fromX) * stepX;
         double localY = top - (tile.firstRow() + fromY) * stepY;
+        double across =
+                Math.min(wanted.columns(pyramid) / texels, within(image.getWidth() - fromX, right - localX, stepX));
+        double down = Math.min(wanted.rows(pyramid) / texels, within(image.getHeight() - fromY, localY, stepY));
         if (grid.sine() == 0 && grid.cosine() == 1) {
             double x = snapped(screenX(localX, localY));
             double y = snapped(screenY(localX, localY));
-            double right = snapped(screenX(localX + across * stepX, localY));
-            double bottom = snapped(screenY(localX, localY - down * stepY));
-            canvas.drawImage(image, fromX, fromY, across, down, x, y, right - x, bottom - y);
+            double width = snapped(screenX(localX + across * stepX, localY)) - x;
+            double height = snapped(screenY(localX, localY - down * stepY)) - y;
+            canvas.drawImage(image, fromX, fromY, across, down, x, y, width, height);
         } else {
             turned(image, localX, localY, stepX, stepY, new double[] {fromX, fromY, across, down});
         }
+    }
+
+    /** The texels of coarse levels may reach beyond the grid; a clip would cost more than all tiles together. */
+    private static double within(double texels, double length, double step) {
+        return Math.min(texels, length / step);
     }
 
     private void turned(Image image, double localX, double localY, double stepX, double stepY, double[] part) {

@@ -1,6 +1,7 @@
 package org.seepledger.desktop.session;
 
 import java.util.Optional;
+import java.util.TreeMap;
 import javafx.beans.property.IntegerProperty;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyObjectProperty;
@@ -9,7 +10,10 @@ import javafx.beans.property.SimpleIntegerProperty;
 import javafx.beans.property.SimpleObjectProperty;
 import javafx.beans.property.SimpleStringProperty;
 import javafx.beans.property.StringProperty;
+import javafx.collections.FXCollections;
+import javafx.collections.ObservableMap;
 import org.seepledger.desktop.notice.Notices;
+import org.seepledger.job.ShownPicture;
 import org.seepledger.prism.Prism;
 import org.seepledger.report.CellPlace;
 
@@ -20,6 +24,8 @@ public final class Session {
     private final ObjectProperty<Drawing> drawing = new SimpleObjectProperty<>(Drawing.NONE);
     private final ObjectProperty<Transects> transects = new SimpleObjectProperty<>(Transects.NONE);
     private final StringProperty transect = new SimpleStringProperty("");
+    private final ObjectProperty<DrawnShapes> shapes = new SimpleObjectProperty<>(DrawnShapes.NONE);
+    private final ObservableMap<String, ShownPicture> pictures = FXCollections.observableMap(new TreeMap<>());
     private final IntegerProperty interval = new SimpleIntegerProperty();
     private final IntegerProperty layer = new SimpleIntegerProperty();
     private final StringProperty selected = new SimpleStringProperty("");
@@ -79,6 +85,16 @@ public final class Session {
     /** {@return the name of the transect that is chosen; empty for none} */
     public StringProperty transect() {
         return transect;
+    }
+
+    /** {@return what is drawn as shapes, for what writes it to a file} */
+    public ObjectProperty<DrawnShapes> shapes() {
+        return shapes;
+    }
+
+    /** {@return the pictures that views offer for handing over, by what they are called there; a view keeps its own up} */
+    public ObservableMap<String, ShownPicture> pictures() {
+        return pictures;
     }
 
     /** {@return the interval looked at, from 0} */

@@ -158,12 +158,18 @@ public final class ShellView extends StackPane {
         return false;
     }
 
-    private void lower(Node page) {
+    /**
+     * Shows a page over all else until it is lifted.
+     *
+     * @param page the page
+     */
+    public void lower(Node page) {
         veil.getChildren().setAll(page);
         veil.setVisible(true);
     }
 
-    private void lift() {
+    /** Puts away what is shown over all else. */
+    public void lift() {
         veil.setVisible(false);
         veil.getChildren().clear();
         focusIn(model.atWelcome().get() ? slots.welcome() : slots.map());

@@ -6,6 +6,7 @@ import javafx.application.Application;
 import javafx.beans.value.ObservableValue;
 import javafx.scene.Parent;
 import javafx.scene.Scene;
+import javafx.scene.paint.Color;
 
 /** Dresses a scene in a theme, and again whenever the theme changes. */
 public final class Dress {
@@ -23,11 +24,14 @@ public final class Dress {
      */
     public static void put(Scene scene, ObservableValue<Theme> theme) {
         scene.getStylesheets().add(SHEET);
-        wear(scene.getRoot(), theme.getValue());
-        theme.addListener((now, before, after) -> wear(scene.getRoot(), after));
+        wear(scene, theme.getValue());
+        theme.addListener((now, before, after) -> wear(scene, after));
     }
 
-    private static void wear(Parent root, Theme theme) {
+    /** The map has no ground of its own but the scene's, which costs nothing to paint, however often the map moves. */
+    private static void wear(Scene scene, Theme theme) {
+        scene.setFill(Color.web(theme.ground().toString()));
+        Parent root = scene.getRoot();
         Application.setUserAgentStylesheet(
                 theme == Theme.LIGHT
                         ? new PrimerLight().getUserAgentStylesheet()

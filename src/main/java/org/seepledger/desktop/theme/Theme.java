@@ -9,9 +9,15 @@ import org.seepledger.picture.Palette;
 /** How the window is lit. */
 public enum Theme {
     /** Ink on paper. */
-    LIGHT,
+    LIGHT(0xf1f0ea),
     /** For dim rooms. */
-    DARK;
+    DARK(0x202528);
+
+    private final Ink.Rgb ground;
+
+    Theme(int ground) {
+        this.ground = new Ink.Rgb(ground);
+    }
 
     /** {@return the other one} */
     public Theme other() {
@@ -21,6 +27,11 @@ public enum Theme {
     /** {@return the colours of inks} */
     public Palette palette() {
         return this == LIGHT ? Palette.LIGHT : Palette.DARK;
+    }
+
+    /** {@return the colour of the map where nothing lies on it} */
+    public Ink.Rgb ground() {
+        return ground;
     }
 
     /** The inks as looked-up colours of the style sheet, {@code -sl-gain} and so on. */

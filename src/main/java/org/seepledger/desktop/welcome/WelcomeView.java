@@ -37,6 +37,7 @@ public final class WelcomeView extends StackPane {
     public WelcomeView(WelcomeModel model) {
         this.model = model;
         setId("welcome");
+        getStyleClass().add("sl-pane");
         VBox page = new VBox(title(), fault(), columns());
         page.getStyleClass().add("sl-welcome");
         page.setMaxWidth(WIDTH + 96);

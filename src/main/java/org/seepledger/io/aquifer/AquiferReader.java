@@ -60,12 +60,28 @@ public final class AquiferReader {
         if (!Files.isRegularFile(file)) {
             throw noSet(folder);
         }
+        Path absolute = folder.toAbsolutePath().normalize();
+        return open(file, String.valueOf(absolute.getFileName()), DataFolder.holding(file, FILE));
+    }
+
+    /**
+     * Opens an aquifer folder that is yet to be made.
+     *
+     * @param description its {@code aquifer.json}
+     * @param files where its data files lie, by the names that the description gives them
+     * @return the set, to be closed
+     * @throws DataFault if something is wrong with it
+     */
+    public static AquiferFolder open(Path description, Map<String, Path> files) {
+        return open(description, "aquifer", DataFolder.of(files, FILE));
+    }
+
+    private static AquiferFolder open(Path file, String folderName, DataFolder folder) {
         JsonNode root = JsonFile.read(file, FILE);
         SchemaCheck.check(root);
-        DataFiles files = new DataFiles(DataFolder.holding(file, FILE));
+        DataFiles files = new DataFiles(folder);
         try {
-            Path absolute = folder.toAbsolutePath().normalize();
-            return new AquiferReader(root, String.valueOf(absolute.getFileName()), files).read(file);
+            return new AquiferReader(root, folderName, files).read(file);
         } catch (RuntimeException e) {
             files.close();
             throw e;

@@ -6,18 +6,23 @@ import javax.xml.stream.XMLInputFactory;
 import javax.xml.stream.XMLStreamException;
 import javax.xml.stream.XMLStreamReader;
 
-/** The scale and offset of each band, from the XML of tag 42112: value = stored × scale + offset. */
+/**
+ * The scale, offset and description of each band, from the XML of tag 42112: value = stored × scale + offset.
+ */
 final class BandScales {
 
     private final TiffFile file;
     private final double[] scales;
     private final double[] offsets;
+    private final String[] descriptions;
 
     private BandScales(TiffFile file, int bands) {
         this.file = file;
         this.scales = new double[bands];
         this.offsets = new double[bands];
+        this.descriptions = new String[bands];
         Arrays.fill(scales, 1);
+        Arrays.fill(descriptions, "");
     }
 
     /**
@@ -63,6 +68,8 @@ final class BandScales {
             double[] target = isScale ? scales : offsets;
             int band = band(sample);
             target[band] = number(reader.getElementText().strip(), role, band);
+        } else if (sample != null && "description".equals(role)) {
+            descriptions[band(sample)] = reader.getElementText().strip();
         }
     }
 
@@ -72,7 +79,7 @@ final class BandScales {
         }
         throw file.fault(
                 Tag.GDAL_METADATA.toString(),
-                "a scale or offset of band index \"" + sample + "\"",
+                "something of band index \"" + sample + "\"",
                 "an index from 0 to " + (scales.length - 1),
                 "Write the raster again, for instance with gdal_translate.");
     }
@@ -99,5 +106,10 @@ final class BandScales {
 
     double offset(int band) {
         return offsets[band];
+    }
+
+    /** What the file calls a band; empty where it does not say. */
+    String description(int band) {
+        return descriptions[band];
     }
 }

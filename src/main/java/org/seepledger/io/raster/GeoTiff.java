@@ -158,6 +158,15 @@ public final class GeoTiff implements Closeable {
     }
 
     /**
+     * {@return what the file calls a band; empty where it does not say}
+     *
+     * @param band from 0
+     */
+    public String description(int band) {
+        return scales.description(band);
+    }
+
+    /**
      * Reads values: stored × scale + offset.
      *
      * @param band from 0

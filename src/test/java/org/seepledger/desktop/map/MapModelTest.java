@@ -63,7 +63,7 @@ class MapModelTest {
         assertThat(model.camera().get().y(5200000)).isBetween(48.0, 700.0);
         assertThat(model.wells().get()).isNotEmpty();
         assertThat(model.contours().lines().get()).isNotEmpty();
-        assertThat(model.flux().field().get()).isPresent();
+        assertThat(model.flux().flux().get()).isPresent();
     }
 
     @Test
@@ -157,12 +157,30 @@ class MapModelTest {
     @Test
     void arrowsThinOutWithDistance() {
         model.showAll();
-        int far = model.flux().field().get().orElseThrow().east().stride();
+        int far = model.flux().flux().get().orElseThrow().field().east().stride();
         model.zoom(500, 350, 6);
-        assertThat(model.flux().field().get().orElseThrow().east().stride()).isLessThan(far);
-        model.overlays().arrows().set(false);
+        assertThat(model.flux().flux().get().orElseThrow().field().east().stride())
+                .isLessThan(far);
         model.overlays().contours().set(false);
         assertThat(model.contours().lines().get()).isEmpty();
+    }
+
+    @Test
+    void onlyFluxThatIsSeenIsReadAndArrowsKeepTheirScale() {
+        Flux whole = model.flux().flux().get().orElseThrow();
+        assertThat(whole.field().east().window().size()).isEqualTo(48 * 60);
+        model.zoom(500, 350, 12);
+        Flux near = model.flux().flux().get().orElseThrow();
+        assertThat(near.field().east().window().size()).isLessThan(400);
+        assertThat(near.greatest()).isEqualTo(whole.greatest());
+        model.drag(20, 0);
+        assertThat(model.flux().flux().get()).contains(near);
+        model.drag(4000, 0);
+        assertThat(model.flux().flux().get()).isNotEqualTo(Optional.of(near));
+        Camera camera = model.camera().get();
+        var grid = opening.set().aquifer().grid();
+        assertThat(FluxArrows.of(near, grid, camera)).hasSizeLessThan(1000);
+        model.overlays().arrows().set(false);
     }
 
     @Test

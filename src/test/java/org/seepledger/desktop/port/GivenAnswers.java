@@ -8,7 +8,7 @@ import java.util.List;
 import java.util.Optional;
 
 /** A machine that answers what a test told it to, and keeps what it was given. */
-public final class GivenAnswers implements FileDialogs, CopyBoard, Questions, RecentFolders {
+public final class GivenAnswers implements FileDialogs, CopyBoard, Questions, RecentFolders, Opener {
 
     /** The answers to come, in order: paths for dialogs, numbers for questions. */
     public final Deque<Optional<Path>> paths = new ArrayDeque<>();
@@ -21,6 +21,9 @@ public final class GivenAnswers implements FileDialogs, CopyBoard, Questions, Re
 
     /** What was copied: text or tab-separated lines, then HTML if there was any. */
     public final List<String> copied = new ArrayList<>();
+
+    /** What was opened. */
+    public final List<Path> opened = new ArrayList<>();
 
     private final List<Path> recent = new ArrayList<>();
 
@@ -55,6 +58,11 @@ public final class GivenAnswers implements FileDialogs, CopyBoard, Questions, Re
     @Override
     public void text(String text) {
         copied.add(text);
+    }
+
+    @Override
+    public void open(Path path) {
+        opened.add(path);
     }
 
     @Override

@@ -1,0 +1,55 @@
+package org.seepledger.desktop.handover;
+
+import java.util.List;
+import javafx.beans.property.BooleanProperty;
+import javafx.beans.property.SimpleBooleanProperty;
+import javafx.beans.value.ObservableValue;
+import org.seepledger.desktop.command.CommandText;
+import org.seepledger.job.PlumeRequest;
+import org.seepledger.unit.Measure;
+
+/** What is chosen of solutes. */
+public final class SoluteChoices {
+
+    private final Entry<Measure> rateUnit = new Entry<>(Meaning.unit("kg/d"));
+    private final Entry<Measure> massUnit = new Entry<>(Meaning.unit("kg"));
+    private final Entry<PlumeRequest.Threshold> above = new Entry<>(Meaning::concentration);
+    private final BooleanProperty dispersion = new SimpleBooleanProperty();
+
+    SoluteChoices() {}
+
+    /** {@return the unit of mass rates} */
+    public Entry<Measure> rateUnit() {
+        return rateUnit;
+    }
+
+    /** {@return the unit of masses} */
+    public Entry<Measure> massUnit() {
+        return massUnit;
+    }
+
+    /** {@return the concentration above which volume and area are counted} */
+    public Entry<PlumeRequest.Threshold> above() {
+        return above;
+    }
+
+    /** {@return whether dispersion is booked} */
+    public BooleanProperty dispersion() {
+        return dispersion;
+    }
+
+    List<ObservableValue<?>> observables() {
+        return List.of(rateUnit.text(), massUnit.text(), above.text(), dispersion);
+    }
+
+    List<Entry<?>> entries() {
+        return List.of(rateUnit, massUnit, above);
+    }
+
+    CommandText into(CommandText command) {
+        return command.with("--rate-unit", rateUnit.value())
+                .with("--mass-unit", massUnit.value())
+                .flag("--dispersion", dispersion.get())
+                .with("--above", above.value().map(limit -> limit.value() + " " + limit.unit()));
+    }
+}
