@@ -86,6 +86,8 @@ final class Assembly {
         draft.tool().addListener((tool, before, after) -> mapView.repaint());
         this.running = new RunningModel(outside.tasks()::running);
         this.folio = new Folio(session, outside.tasks(), outside.copies(), outside.dialogs(), shell.theme());
+        mapView.lay(folio.plumeMap()::marks);
+        folio.plumeMap().changes().addListener((changes, before, after) -> mapView.repaint());
         Slots slots = new Slots(
                 new WelcomeView(welcome),
                 new ShowingBar(map),

@@ -8,6 +8,7 @@ import javafx.scene.image.Image;
 import javafx.scene.image.PixelFormat;
 import javax.imageio.ImageIO;
 import org.seepledger.desktop.theme.Theme;
+import org.seepledger.job.MapQuantity;
 
 /** Writes pictures of each view, light and dark, in two sizes, into the folder given. */
 public final class Screenshots {
@@ -46,9 +47,34 @@ public final class Screenshots {
                 window.robot.press(javafx.scene.input.KeyCode.F1).release(javafx.scene.input.KeyCode.F1);
                 window.settle();
                 both(window, folder, "actions", suffix);
+                window.robot.type(javafx.scene.input.KeyCode.ESCAPE);
+                solutes(window, folder, suffix);
             }
         }
         System.exit(0);
+    }
+
+    private static void solutes(OpenWindow window, Path folder, String suffix) throws IOException {
+        window.openSet(Path.of("sample-aquifers/depot"));
+        window.settle();
+        window.robot.interact(() -> {
+            window.assembly().session().solute().set("solvent");
+            window.assembly().session().interval().set(5);
+            window.assembly()
+                    .map()
+                    .values()
+                    .quantity()
+                    .set(window.assembly().map().values().quantities().stream()
+                            .filter(each -> each.kind() == MapQuantity.Kind.CONCENTRATION)
+                            .findFirst());
+        });
+        window.settle();
+        window.robot.clickOn("#solute-threshold").write("0.1 mg/L").type(javafx.scene.input.KeyCode.ENTER);
+        for (String page : new String[] {"ledger", "answers", "transects"}) {
+            window.robot.clickOn("#folio-" + page);
+            window.settle();
+            both(window, folder, "solute-" + page, suffix);
+        }
     }
 
     private static void both(OpenWindow window, Path folder, String name, String suffix) throws IOException {

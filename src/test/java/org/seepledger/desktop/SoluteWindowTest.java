@@ -100,7 +100,7 @@ class SoluteWindowTest {
                 .lines()
                 .map(line -> line.split("\t", -1))
                 .filter(cells -> cells.length == 7 && cells[6].equals("kg"))
-                .filter(cells -> !cells[0].equals("dissolved and sorbed"))
+                .filter(cells -> !cells[0].equals("both together"))
                 .map(cells -> String.join(" ", List.of(cells).subList(1, 6)).strip())
                 .toList();
     }
@@ -146,7 +146,7 @@ class SoluteWindowTest {
                 .lines()
                 .map(line -> line.split("\t", -1))
                 .filter(cells -> cells.length == 10 && (cells[0].startsWith("segment") || cells[0].equals("all")))
-                .map(cells -> String.join(" ", List.of(cells).subList(2, 8)))
+                .map(cells -> String.join(" ", List.of(cells[8], cells[9], cells[2], cells[6], cells[7], cells[5])))
                 .toList();
         assertThat(rows).hasSize(3).isEqualTo(ofCommand(lines, "transect.csv", 23, "transect", 9, 10, 11, 13, 14, 15));
     }

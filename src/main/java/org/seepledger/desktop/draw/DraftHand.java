@@ -246,21 +246,6 @@ public final class DraftHand implements Hand {
     }
 
     /**
-     * Gives the chosen transect another name.
-     *
-     * @param name the name
-     */
-    public void nameTransect(String name) {
-        model.selectedLine().filter(known -> !known.name().equals(name)).ifPresent(known -> {
-            if (model.step(
-                    "step.transect.name",
-                    drawing -> drawing.editLine(known.name(), given -> given.named(name.strip())))) {
-                model.session().transect().set(name.strip());
-            }
-        });
-    }
-
-    /**
      * Puts the chosen sides under a boundary.
      *
      * @param name its name; empty to let them count under their own

@@ -40,6 +40,7 @@ public final class DraftModel {
      */
     public DraftModel(Session session) {
         this.session = session;
+        session.transectName().addListener((name, before, after) -> after.ifPresent(this::rename));
         session.demand().addListener((demand, before, after) -> {
             if (after == Session.Demand.DRAW_PRISM) {
                 session.demand().set(Session.Demand.NONE);
@@ -110,6 +111,15 @@ public final class DraftModel {
                             .findFirst()
                             .orElse(""));
         }
+    }
+
+    private void rename(String name) {
+        session.transectName().set(Optional.empty());
+        selectedLine().filter(line -> !line.name().equals(name)).ifPresent(line -> {
+            if (step("step.transect.name", drawing -> drawing.editLine(line.name(), given -> given.named(name)))) {
+                session.transect().set(name);
+            }
+        });
     }
 
     /** {@return the transect that is chosen, if there is one} */

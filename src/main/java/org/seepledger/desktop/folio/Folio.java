@@ -8,6 +8,8 @@ import javafx.scene.control.ToggleButton;
 import javafx.scene.control.ToggleGroup;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.HBox;
+import javafx.scene.layout.StackPane;
+import javafx.scene.layout.VBox;
 import org.seepledger.desktop.action.Action;
 import org.seepledger.desktop.budget.FaceFeed;
 import org.seepledger.desktop.budget.LiveBudget;
@@ -24,8 +26,14 @@ import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.solute.LivePlume;
+import org.seepledger.desktop.solute.MassFeed;
 import org.seepledger.desktop.solute.MassReading;
+import org.seepledger.desktop.solute.PlumeMapModel;
+import org.seepledger.desktop.solute.SoluteAnswersModel;
+import org.seepledger.desktop.solute.SoluteAnswersView;
 import org.seepledger.desktop.solute.SoluteLook;
+import org.seepledger.desktop.solute.SolutePanel;
+import org.seepledger.desktop.solute.SolutePanelModel;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.theme.Theme;
 import org.seepledger.desktop.transect.TransectModel;
@@ -41,6 +49,8 @@ public final class Folio {
     private final LiveBudget live;
     private final LivePlume plumes;
     private final Session session;
+    private final PlumeMapModel plumeMap;
+    private final ToggleButton transectsMark;
     private final LedgerModel ledger;
     private final TransectModel transects;
     private final Node ribbon;
@@ -61,7 +71,10 @@ public final class Folio {
         new FaceFeed(session, live, reading).begin();
         SoluteLook look = new SoluteLook(session);
         this.plumes = new LivePlume(session, look, tasks);
+        this.plumeMap = new PlumeMapModel(session, look, plumes, tasks);
         MassReading masses = new MassReading(session, reading);
+        new MassFeed(session, plumes, masses);
+        SoluteAnswersModel answers = new SoluteAnswersModel(session, live, reading, plumes, masses, look);
         this.ledger = new LedgerModel(session, live, reading, plumes, masses, copies);
         this.transects = new TransectModel(session, tasks, reading, masses, copies, dialogs);
         pages.setId("folio");
@@ -69,13 +82,19 @@ public final class Folio {
         marks.getStyleClass().add("sl-marks");
         marks.setId("folio-marks");
         add("folio.ledger", new LedgerView(ledger));
-        add("folio.answers", new ClosureView(new ClosureModel(session, live, reading), theme));
+        add(
+                "folio.answers",
+                ofSubject(
+                        new ClosureView(new ClosureModel(session, live, reading), theme),
+                        new SoluteAnswersView(answers)));
         add("folio.exchange", new ExchangeView(new ExchangeModel(session, live, reading, copies), theme));
-        ofSolutes(add("folio.transects", new TransectView(transects)), transects.open());
+        this.transectsMark = add("folio.transects", new TransectView(transects));
+        ofSolutes(transectsMark, transects.open());
         marks.getChildren().add(new SubjectBox(session));
-        pages.setTop(marks);
+        SolutePanelModel panel = new SolutePanelModel(session, look, plumes);
+        pages.setTop(new VBox(marks, new SolutePanel(panel, () -> open(1))));
         chosen.selectToggle(chosen.getToggles().get(0));
-        this.ribbon = new ChartView(new ChartModel(session, live, reading), theme);
+        this.ribbon = new ChartView(new ChartModel(session, live, reading, plumes, masses, answers), theme);
     }
 
     private ToggleButton add(String words, Node page) {
@@ -97,6 +116,18 @@ public final class Folio {
         });
         marks.getChildren().add(mark);
         return mark;
+    }
+
+    /** One page for the water, and another for a solute. */
+    private Node ofSubject(Node water, Node solute) {
+        solute.visibleProperty().bind(session.solute().isNotEmpty());
+        water.visibleProperty().bind(solute.visibleProperty().not());
+        return new StackPane(water, solute);
+    }
+
+    /** {@return what the map shows of the solute looked at} */
+    public PlumeMapModel plumeMap() {
+        return plumeMap;
     }
 
     /** A page that is there only where the set has solutes. */
@@ -139,7 +170,12 @@ public final class Folio {
                 new Action(group, "action.page.ledger", "Shortcut+1", () -> open(0)),
                 new Action(group, "action.page.answers", "Shortcut+2", () -> open(1)),
                 new Action(group, "action.page.exchange", "Shortcut+3", () -> open(2)),
-                new Action(group, "action.page.transects", "Shortcut+7", this::hasSolutes, () -> open(3)),
+                new Action(
+                        group,
+                        "action.page.transects",
+                        "Shortcut+7",
+                        this::hasSolutes,
+                        () -> chosen.selectToggle(transectsMark)),
                 new Action(group, "action.panels", "Shortcut+Shift+P", this::hasSolutes, this::openPanels),
                 new Action(
                         group, "action.subject", "Shortcut+Shift+U", this::hasSolutes, () -> SubjectBox.next(session)),
@@ -154,7 +190,7 @@ public final class Folio {
     }
 
     private void openPanels() {
-        open(3);
+        chosen.selectToggle(transectsMark);
         transects.openPanels();
     }
 

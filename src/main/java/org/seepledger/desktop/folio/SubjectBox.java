@@ -16,12 +16,16 @@ import org.seepledger.desktop.words.Words;
 /** Whose budget all pages show: the water's, or a solute's. Not there where the set has no solutes. */
 final class SubjectBox extends HBox {
 
+    private static final double WIDTH = 136;
+
     private final Session session;
     private final ChoiceBox<String> subjects = new ChoiceBox<>();
 
     SubjectBox(Session session) {
         this.session = session;
         subjects.setId("subject");
+        subjects.setPrefWidth(WIDTH);
+        subjects.setMinWidth(USE_PREF_SIZE);
         subjects.setConverter(new StringConverter<>() {
             @Override
             public String toString(String solute) {

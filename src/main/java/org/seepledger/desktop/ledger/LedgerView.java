@@ -20,7 +20,7 @@ public final class LedgerView extends BorderPane {
 
     private static final KeyCombination COPY = new KeyCodeCombination(KeyCode.C, KeyCombination.SHORTCUT_DOWN);
     private static final PseudoClass HEADING = PseudoClass.getPseudoClass("heading");
-    private static final double BRACKET = 84;
+    private static final double BRACKET = 98;
     private static final PseudoClass TOTAL = PseudoClass.getPseudoClass("total");
 
     private final LedgerModel model;
@@ -44,7 +44,8 @@ public final class LedgerView extends BorderPane {
     private void buildTable() {
         table.setId("ledger-table");
         table.setItems(model.rows());
-        table.setColumnResizePolicy(TableView.CONSTRAINED_RESIZE_POLICY_FLEX_LAST_COLUMN);
+        fit(model.solute().get());
+        model.solute().addListener((solute, before, after) -> fit(after));
         table.setPlaceholder(new Label());
         table.getColumns().add(nameColumn());
         table.getColumns().add(numbers("ledger.in", Order.LARGEST_IN, LedgerRow::inflow));
@@ -67,6 +68,14 @@ public final class LedgerView extends BorderPane {
                 key.consume();
             }
         });
+    }
+
+    /** A solute's columns are more than there may be room for, and then scroll; no number is cut short. */
+    private void fit(String solute) {
+        table.setColumnResizePolicy(
+                solute.isEmpty()
+                        ? TableView.CONSTRAINED_RESIZE_POLICY_FLEX_LAST_COLUMN
+                        : TableView.UNCONSTRAINED_RESIZE_POLICY);
     }
 
     /** Selects the row of the face that is lit up, and lets go of others. */

@@ -82,6 +82,11 @@ final class MapCanvas extends Region {
         guests.add(guest);
     }
 
+    /** Lets something else draw over the map, below what was invited before. */
+    void layBelow(MarkSource guest) {
+        guests.add(0, guest);
+    }
+
     private void repaintGround() {
         groundStale = true;
         repaint();

@@ -26,6 +26,7 @@ public final class Session {
     private final StringProperty transect = new SimpleStringProperty("");
     private final ObjectProperty<DrawnShapes> shapes = new SimpleObjectProperty<>(DrawnShapes.NONE);
     private final ObservableMap<String, ShownPicture> pictures = FXCollections.observableMap(new TreeMap<>());
+    private final ObjectProperty<Optional<String>> transectName = new SimpleObjectProperty<>(Optional.empty());
     private final IntegerProperty interval = new SimpleIntegerProperty();
     private final IntegerProperty layer = new SimpleIntegerProperty();
     private final StringProperty selected = new SimpleStringProperty("");
@@ -95,6 +96,11 @@ public final class Session {
     /** {@return the pictures that views offer for handing over, by what they are called there; a view keeps its own up} */
     public ObservableMap<String, ShownPicture> pictures() {
         return pictures;
+    }
+
+    /** {@return the name that a pane asks for the chosen transect; whoever gives it empties it} */
+    public ObjectProperty<Optional<String>> transectName() {
+        return transectName;
     }
 
     /** {@return the interval looked at, from 0} */

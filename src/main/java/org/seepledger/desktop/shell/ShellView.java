@@ -38,7 +38,7 @@ public final class ShellView extends StackPane {
     private final ActionsPage actionsPage;
     private final NoticePage noticePage;
     private final RunningList runningList;
-    private final CautionPage cautionPage = new CautionPage(this::lift);
+    private final CautionPage cautionPage;
 
     /**
      * Builds the frame.
@@ -52,6 +52,12 @@ public final class ShellView extends StackPane {
         this.model = model;
         this.slots = slots;
         this.actions = actions;
+        this.cautionPage = new CautionPage(
+                model.session()
+                        .set()
+                        .map(set ->
+                                set.filter(open -> !open.solutes().isEmpty()).isPresent()),
+                this::lift);
         this.actionsPage = new ActionsPage(actions, this::lift);
         work.setTop(new Caption(model, slots.showing(), this::showActions));
         work.setCenter(panes());

@@ -167,6 +167,17 @@ public final class TransectModel {
         show();
     }
 
+    /**
+     * Asks for another name of the drawn transect that is chosen.
+     *
+     * @param name the name
+     */
+    public void rename(String name) {
+        if (chosen.get().filter(choice -> choice.measured < 0).isPresent()) {
+            session.transectName().set(Optional.of(name.strip()));
+        }
+    }
+
     private void fill() {
         List<Choice> all = new ArrayList<>();
         session.transects().get().lines().forEach(line -> all.add(new Choice(line.name(), -1)));

@@ -3,6 +3,7 @@ package org.seepledger.desktop.transect;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
+import java.util.function.Function;
 import org.seepledger.desktop.port.CopyTable;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.words.Words;
@@ -128,31 +129,25 @@ record TransectTable(String whose, List<TransectRow> rows, double half, double m
 
     /** What each column is called, with its unit as it is read. */
     List<String> titles() {
+        return header(Wording::raised, "transect.low", "transect.high");
+    }
+
+    private List<String> header(Function<Measure, String> unit, String low, String high) {
         return List.of(
                 Words.of("transect.part"),
                 Words.of("transect.layer"),
-                Words.of("transect.area", Wording.raised(units.area)),
-                Words.of("transect.flow", Wording.raised(units.flow)),
-                Words.of("transect.discharge", Wording.raised(units.rate)),
-                Words.of("transect.low"),
-                Words.of("transect.high"),
-                Words.of("transect.concentration", Wording.raised(units.concentration)),
+                Words.of("transect.discharge", unit.apply(units.rate)),
                 Words.of("transect.share"),
-                Words.of("transect.areashare"));
+                Words.of("transect.areashare"),
+                Words.of("transect.concentration", unit.apply(units.concentration)),
+                Words.of(low, unit.apply(units.rate)),
+                Words.of(high, unit.apply(units.rate)),
+                Words.of("transect.area", unit.apply(units.area)),
+                Words.of("transect.flow", unit.apply(units.flow)));
     }
 
     CopyTable copy() {
-        List<String> header = List.of(
-                Words.of("transect.part"),
-                Words.of("transect.layer"),
-                Words.of("transect.area", units.area),
-                Words.of("transect.flow", units.flow),
-                Words.of("transect.discharge", units.rate),
-                Words.of("transect.low.full", units.rate),
-                Words.of("transect.high.full", units.rate),
-                Words.of("transect.concentration", units.concentration),
-                Words.of("transect.share"),
-                Words.of("transect.areashare"));
+        List<String> header = header(Measure::toString, "transect.low.full", "transect.high.full");
         String foot = concentrated() + " " + Disclaimer.text() + " " + String.join(" ", SoluteCautions.sentences());
         return new CopyTable(
                 whose, header, rows.stream().map(TransectTable::cells).toList(), foot);
@@ -162,13 +157,13 @@ record TransectTable(String whose, List<TransectRow> rows, double half, double m
         return List.of(
                 row.name(),
                 CsvText.text(row.layer()),
-                CsvText.number(row.area()),
-                CsvText.number(row.flow()),
                 CsvText.number(row.discharge()),
+                CsvText.number(row.share()),
+                CsvText.number(row.areaShare()),
+                CsvText.number(row.concentration()),
                 CsvText.number(row.low()),
                 CsvText.number(row.high()),
-                CsvText.number(row.concentration()),
-                CsvText.number(row.share()),
-                CsvText.number(row.areaShare()));
+                CsvText.number(row.area()),
+                CsvText.number(row.flow()));
     }
 }

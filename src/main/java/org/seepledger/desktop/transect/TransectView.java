@@ -12,6 +12,7 @@ import javafx.scene.control.TableCell;
 import javafx.scene.control.TableColumn;
 import javafx.scene.control.TableRow;
 import javafx.scene.control.TableView;
+import javafx.scene.control.TextField;
 import javafx.scene.control.Tooltip;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.FlowPane;
@@ -25,18 +26,18 @@ import org.seepledger.unit.Figures;
 public final class TransectView extends BorderPane {
 
     private static final PseudoClass TOTAL = PseudoClass.getPseudoClass("total");
-    private static final double NUMBER = 92;
+    private static final double NUMBER = 102;
 
     /** How the numbers of a row read, in the order of columns. */
     private static final List<Function<TransectRow, String>> NUMBERS = List.of(
-            row -> Figures.tabular(row.area()),
-            row -> Figures.tabular(row.flow()),
             row -> Figures.tabular(row.discharge()),
+            row -> Figures.typesetPercent(row.share()),
+            row -> Figures.typesetPercent(row.areaShare()),
+            row -> Figures.tabular(row.concentration()),
             row -> Figures.tabular(row.low()),
             row -> Figures.tabular(row.high()),
-            row -> Figures.tabular(row.concentration()),
-            row -> Figures.typesetPercent(row.share()),
-            row -> Figures.typesetPercent(row.areaShare()));
+            row -> Figures.tabular(row.area()),
+            row -> Figures.tabular(row.flow()));
 
     private final TransectModel model;
     private final TableView<TransectRow> table = new TableView<>();
@@ -53,7 +54,7 @@ public final class TransectView extends BorderPane {
     public TransectView(TransectModel model) {
         this.model = model;
         setId("transects");
-        getStyleClass().add("sl-ledger");
+        getStyleClass().addAll("sl-ledger", "sl-transects");
         table.setId("transect-table");
         table.setPlaceholder(new Label());
         table.setRowFactory(made -> new KindRow());
@@ -103,8 +104,28 @@ public final class TransectView extends BorderPane {
                 8,
                 6,
                 choices,
+                name(),
                 button("transect-copy", "ledger.copy", "ledger.copy.tip", model::copy),
                 button("transect-panels", "transect.panels", "transect.panels.tip", model::openPanels));
+    }
+
+    /** The chosen transect's name, to type another. */
+    private TextField name() {
+        TextField name = new TextField();
+        name.setId("transect-name");
+        name.getStyleClass().add("small");
+        name.setPrefColumnCount(8);
+        name.setPromptText(Words.of("transect.name"));
+        name.setTooltip(new Tooltip(Words.of("transect.name.tip")));
+        name.disableProperty()
+                .bind(model.chosen()
+                        .map(chosen ->
+                                chosen.filter(choice -> choice.measured() < 0).isEmpty()));
+        name.setOnAction(entered -> {
+            model.rename(name.getText());
+            name.clear();
+        });
+        return name;
     }
 
     private static Button button(String id, String words, String tip, Runnable does) {
@@ -116,8 +137,8 @@ public final class TransectView extends BorderPane {
     }
 
     private void buildColumns() {
-        table.getColumns().add(column(TransectRow::name, 110));
-        table.getColumns().add(column(TransectRow::layer, 80));
+        table.getColumns().add(column(TransectRow::name, 88));
+        table.getColumns().add(column(TransectRow::layer, 70));
         for (Function<TransectRow, String> number : NUMBERS) {
             TableColumn<TransectRow, TransectRow> column = column(number, NUMBER);
             column.getStyleClass().add("sl-numbers");
