@@ -21,15 +21,17 @@ public final class TracedRow {
     }
 
     /**
-     * {@return the net of one account}
+     * {@return the net of some accounts together}
      *
-     * @param account its place among them
+     * @param which their places among them
      * @param accounts the accounts of a prism
      */
-    public static TracedRow of(int account, List<Account> accounts) {
+    public static TracedRow of(List<Integer> which, List<Account> accounts) {
         TracedRow row = new TracedRow(accounts.size());
-        row.inflow[account] = 1;
-        row.outflow[account] = -1;
+        for (int account : which) {
+            row.inflow[account] = 1;
+            row.outflow[account] = -1;
+        }
         return row;
     }
 

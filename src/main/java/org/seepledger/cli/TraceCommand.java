@@ -27,7 +27,8 @@ import picocli.CommandLine.Parameters;
             "    --prisms sample-aquifers/terrace/prisms.geojson \\",
             "    --row \"well field/interval 1/river side/1\" --out trace.csv",
             "",
-            "ROW is PRISM/PERIOD/ITEM/LAYER with the words of budget.csv; LAYER is * for a total, as \"residual/*\". It is"
+            "ROW is PRISM/PERIOD/ITEM/LAYER with the words of budget.csv; LAYER is * for a total, as \"residual/*\","
+                    + " and for an item over all its layers. It is"
                     + " held against the rows that there are, not split, so slashes in names stand as they are. Where"
                     + " several groups have an item of that name, write PRISM/PERIOD/GROUP/ITEM/LAYER.",
             "FILE is a CSV: file, place (band or column, and cell), value as it stands there, weight.",

@@ -3,7 +3,11 @@ package org.seepledger.desktop;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
+import javafx.beans.binding.Bindings;
+import javafx.beans.binding.BooleanBinding;
+import javafx.scene.Node;
 import javafx.scene.Scene;
+import javafx.scene.layout.StackPane;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.desktop.action.Action;
 import org.seepledger.desktop.action.Actions;
@@ -11,10 +15,15 @@ import org.seepledger.desktop.draw.DraftActions;
 import org.seepledger.desktop.draw.DraftFiles;
 import org.seepledger.desktop.draw.DraftHand;
 import org.seepledger.desktop.draw.DraftModel;
+import org.seepledger.desktop.draw.LidSurfaces;
 import org.seepledger.desktop.draw.Tray;
 import org.seepledger.desktop.folio.Folio;
 import org.seepledger.desktop.handover.HandoverModel;
 import org.seepledger.desktop.handover.HandoverPage;
+import org.seepledger.desktop.intake.IntakeModel;
+import org.seepledger.desktop.intake.IntakeView;
+import org.seepledger.desktop.intake.MendModel;
+import org.seepledger.desktop.intake.MendView;
 import org.seepledger.desktop.map.GroundModel;
 import org.seepledger.desktop.map.MapModel;
 import org.seepledger.desktop.map.MapView;
@@ -25,7 +34,9 @@ import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.port.Opener;
 import org.seepledger.desktop.port.Questions;
 import org.seepledger.desktop.port.RecentFolders;
+import org.seepledger.desktop.port.Settings;
 import org.seepledger.desktop.running.RunningModel;
+import org.seepledger.desktop.running.RunningStrip;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Opening;
 import org.seepledger.desktop.session.Session;
@@ -34,6 +45,7 @@ import org.seepledger.desktop.shell.ShellView;
 import org.seepledger.desktop.shell.Slots;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.theme.Dress;
+import org.seepledger.desktop.welcome.FolderDrop;
 import org.seepledger.desktop.welcome.WelcomeModel;
 import org.seepledger.desktop.welcome.WelcomeView;
 import org.seepledger.desktop.words.Words;
@@ -45,6 +57,8 @@ final class Assembly {
     private final Session session = new Session();
     private final ShellModel shell = new ShellModel(session);
     private final WelcomeModel welcome;
+    private final IntakeModel intake;
+    private final MendModel mend;
     private final MapModel map;
     private final DraftModel draft;
     private final DraftHand hand;
@@ -63,6 +77,7 @@ final class Assembly {
             Questions questions,
             CopyBoard copies,
             RecentFolders folders,
+            Settings settings,
             Opener opener) {}
 
     Assembly(Outside outside, List<Path> samplePlaces) {
@@ -70,11 +85,15 @@ final class Assembly {
         this.map = new MapModel(session, outside.tasks());
         this.welcome = new WelcomeModel(
                 outside.tasks(), outside.dialogs(), outside.folders(), this::show, go -> files().whenSafe(go));
+        this.intake = new IntakeModel(outside.tasks(), outside.dialogs(), welcome::open);
+        this.mend = new MendModel(outside.tasks(), welcome::open);
+        welcome.whenLoose(this::bring);
+        welcome.whenWrong(mend::mend);
         Actions actions = new Actions();
         this.draft = new DraftModel(session);
         this.hand = new DraftHand(draft);
         this.files = new DraftFiles(draft, outside.tasks(), outside.dialogs(), outside.questions());
-        this.tray = new Tray(draft, hand);
+        this.tray = new Tray(draft, hand, new LidSurfaces(draft, outside.tasks(), outside.dialogs()));
         this.mapView = new MapView(
                 map,
                 new GroundModel(session, outside.tasks(), outside.dialogs()),
@@ -85,16 +104,13 @@ final class Assembly {
         draft.version().addListener((version, before, after) -> mapView.repaint());
         draft.tool().addListener((tool, before, after) -> mapView.repaint());
         this.running = new RunningModel(outside.tasks()::running);
-        this.folio = new Folio(session, outside.tasks(), outside.copies(), outside.dialogs(), shell.theme());
+        this.folio = new Folio(session, outside.tasks(), outside.dialogs(), outside.copies(), shell.theme());
         mapView.lay(folio.plumeMap()::marks);
         folio.plumeMap().changes().addListener((changes, before, after) -> mapView.repaint());
         Slots slots = new Slots(
-                new WelcomeView(welcome),
-                new ShowingBar(map),
-                mapView,
-                Optional.of(folio.pages()),
-                Optional.of(folio.ribbon()));
-        this.view = new ShellView(shell, slots, actions, running);
+                firstPages(), new ShowingBar(map), mapView, Optional.of(folio.pages()), Optional.of(folio.ribbon()));
+        this.view = new ShellView(shell, slots, actions, running, outside.settings());
+        FolderDrop.on(view, welcome, over -> session.status().set(over ? Words.of("drop.open") : ""));
         actions.add(actionsOfWindow());
         actions.add(mapView.actions());
         actions.add(new DraftActions(draft, hand, files, tray, mapView::repaint).all(map));
@@ -117,9 +133,12 @@ final class Assembly {
         return List.of(
                 new Action(window, "action.list", "F1", view::showActions),
                 new Action(window, "action.open", "Shortcut+O", welcome::choose),
+                new Action(window, "action.intake", "Shortcut+Shift+O", this::turnToIntake),
                 new Action(window, "action.welcome", "Shortcut+Home", shell::turnPage),
                 new Action(window, "action.theme", "F9", shell::switchTheme),
                 new Action(window, "action.pane", "F6", view::nextPane),
+                new Action(window, "action.fold.side", "Shift+F6", view::turnSide),
+                new Action(window, "action.fold.below", "Shortcut+F6", view::turnBelow),
                 new Action(window, "action.caution", "Shift+F1", view::showCaution),
                 new Action(window, "action.notices", "F7", view::showNotices),
                 new Action(window, "action.running", "F10", view::showRunning),
@@ -129,6 +148,42 @@ final class Assembly {
                 new Action(time, "action.earlier", "Comma", () -> shell.move(-1)),
                 new Action(time, "action.deeper", "Page Down", () -> shell.sink(1)),
                 new Action(time, "action.higher", "Page Up", () -> shell.sink(-1)));
+    }
+
+    /** One behind the other; what is behind is hidden from the keyboard too. */
+    private Node firstPages() {
+        WelcomeView first = new WelcomeView(welcome);
+        IntakeView loose = new IntakeView(intake, new RunningStrip(running, this::listRunning), this::leaveIntake);
+        MendView wrong = new MendView(mend);
+        BooleanBinding mending =
+                Bindings.createBooleanBinding(() -> mend.folder().get().isPresent(), mend.folder());
+        first.visibleProperty().bind(intake.shown().or(mending).not());
+        loose.visibleProperty().bind(intake.shown().and(mending.not()));
+        wrong.visibleProperty().bind(mending);
+        return new StackPane(first, loose, wrong);
+    }
+
+    private void listRunning() {
+        view.showRunning();
+    }
+
+    private void turnToIntake() {
+        if (intake.shown().get() && shell.atWelcome().get()) {
+            leaveIntake();
+        } else {
+            bring(List.of());
+        }
+    }
+
+    /** Shows the import assistant, with more files. */
+    private void bring(List<Path> paths) {
+        shell.atWelcome().set(true);
+        intake.bring(paths);
+    }
+
+    private void leaveIntake() {
+        intake.shown().set(false);
+        shell.atWelcome().set(session.set().get().isEmpty());
     }
 
     private void again() {
@@ -198,5 +253,13 @@ final class Assembly {
 
     WelcomeModel welcome() {
         return welcome;
+    }
+
+    MendModel mend() {
+        return mend;
+    }
+
+    IntakeModel intake() {
+        return intake;
     }
 }

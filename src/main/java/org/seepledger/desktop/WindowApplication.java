@@ -4,9 +4,11 @@ import java.nio.file.Path;
 import java.util.prefs.Preferences;
 import javafx.application.Application;
 import javafx.application.Platform;
+import javafx.scene.image.Image;
 import javafx.stage.Stage;
 import org.seepledger.desktop.platform.HostOpener;
 import org.seepledger.desktop.platform.PreferredFolders;
+import org.seepledger.desktop.platform.PreferredSettings;
 import org.seepledger.desktop.platform.ScreenCopyBoard;
 import org.seepledger.desktop.platform.ScreenDialogs;
 import org.seepledger.desktop.platform.ScreenQuestions;
@@ -28,15 +30,18 @@ public final class WindowApplication extends Application {
 
     @Override
     public void start(Stage stage) {
+        Preferences kept = Preferences.userRoot().node("org/seepledger/desktop");
         Assembly assembly = new Assembly(
                 new Assembly.Outside(
                         tasks,
                         new ScreenDialogs(stage),
                         new ScreenQuestions(stage),
                         new ScreenCopyBoard(),
-                        new PreferredFolders(Preferences.userRoot().node("org/seepledger/desktop")),
+                        new PreferredFolders(kept),
+                        new PreferredSettings(kept),
                         new HostOpener(getHostServices())),
                 Samples.usualPlaces());
+        stage.getIcons().add(new Image(WindowApplication.class.getResourceAsStream("icon.png")));
         stage.setTitle(Words.of("program"));
         stage.setMinWidth(LEAST_WIDTH);
         stage.setMinHeight(LEAST_HEIGHT);

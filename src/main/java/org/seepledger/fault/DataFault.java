@@ -10,6 +10,9 @@ public final class DataFault extends RuntimeException {
 
     private static final long serialVersionUID = 1L;
 
+    private final String file;
+    private final String place;
+
     /**
      * Describes one fault.
      *
@@ -21,6 +24,18 @@ public final class DataFault extends RuntimeException {
      */
     public DataFault(String file, String place, String found, String expected, String remedy) {
         super(line(file, place, found, expected, remedy));
+        this.file = file;
+        this.place = place;
+    }
+
+    /** {@return the file as the user named it, or the part of the data set} */
+    public String file() {
+        return file;
+    }
+
+    /** {@return the place in it; empty where it is the whole} */
+    public String place() {
+        return place;
     }
 
     private static String line(String file, String place, String found, String expected, String remedy) {

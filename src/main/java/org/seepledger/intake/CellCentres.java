@@ -15,8 +15,14 @@ import org.seepledger.aquifer.Grid;
  */
 final class CellCentres {
 
-    /** Centres nearer to each other than this share of the least distance are one; tables are rounded. */
-    private static final double SAME = 0.02;
+    /** Centres nearer to each other than this share of the widest distance between lines are in one line. */
+    private static final double SAME = 0.005;
+
+    /** How far a distance between lines may be from a multiple of the least one, in shares of it. */
+    private static final double MULTIPLE = 0.02;
+
+    /** A grid of more cells than this for each centre is none. */
+    private static final double MOST_EMPTY = 40;
 
     /** A turn below this, in degrees, is rounding. */
     private static final double LEAST_TURN = 1e-4;
@@ -28,60 +34,88 @@ final class CellCentres {
         if (x.length < 4) {
             return Optional.empty();
         }
-        double turn = turn(x, y);
-        double cosine = Math.cos(turn);
-        double sine = Math.sin(turn);
-        double[] along = new double[x.length];
-        double[] across = new double[x.length];
-        for (int i = 0; i < x.length; i++) {
-            along[i] = (x[i] - x[0]) * cosine + (y[i] - y[0]) * sine;
-            across[i] = (y[i] - y[0]) * cosine - (x[i] - x[0]) * sine;
+        Turned best = Turned.of(x, y, Math.toDegrees(turn(x, y)));
+        for (int decimals = 4; decimals >= 0; decimals--) {
+            Turned rounder = Turned.of(x, y, rounded(best.degrees, decimals));
+            best = rounder.fitsLike(best) ? rounder : best;
         }
-        double[] columns = apart(along);
-        double[] rows = apart(across);
-        boolean filled = (double) columns.length * rows.length <= 40.0 * x.length;
-        if (columns.length < 2 || rows.length < 2 || !filled) {
+        boolean filled = (double) best.columns.places.length * best.rows.places.length <= MOST_EMPTY * x.length;
+        if (best.columns.places.length < 2 || best.rows.places.length < 2 || !filled) {
             return Optional.empty();
         }
-        Optional<double[]> edgesX = edges(filled(columns));
-        Optional<double[]> edgesY = edges(filled(rows));
-        return edgesX.isEmpty() || edgesY.isEmpty()
-                ? Optional.empty()
-                : Optional.of(grid(edgesX.get(), edgesY.get(), x[0], y[0], turn));
+        Turned found = best;
+        return edges(filled(found.columns.places))
+                .flatMap(edgesX ->
+                        edges(filled(found.rows.places)).map(edgesY -> found.grid(edgesX, edgesY, x[0], y[0])));
     }
 
-    private static Grid grid(double[] edgesX, double[] edgesY, double x, double y, double turn) {
-        double cosine = Math.cos(turn);
-        double sine = Math.sin(turn);
-        double cornerX = x + edgesX[0] * cosine - edgesY[0] * sine;
-        double cornerY = y + edgesX[0] * sine + edgesY[0] * cosine;
-        double degrees = Math.toDegrees(turn);
-        return new Grid(axis(cornerX, edgesX), axis(cornerY, edgesY), Numbers.clean(degrees), 1);
+    private static double rounded(double value, int decimals) {
+        double unit = Math.pow(10, decimals);
+        return Math.rint(value * unit) / unit;
+    }
+
+    /** Centres seen along both axes of a grid that is turned by some degrees. */
+    private record Turned(double degrees, Lines columns, Lines rows) {
+
+        static Turned of(double[] x, double[] y, double degrees) {
+            double cosine = Math.cos(Math.toRadians(degrees));
+            double sine = Math.sin(Math.toRadians(degrees));
+            double[] along = new double[x.length];
+            double[] across = new double[x.length];
+            for (int i = 0; i < x.length; i++) {
+                along[i] = (x[i] - x[0]) * cosine + (y[i] - y[0]) * sine;
+                across[i] = (y[i] - y[0]) * cosine - (x[i] - x[0]) * sine;
+            }
+            return new Turned(degrees, Lines.of(along), Lines.of(across));
+        }
+
+        /** Whether the centres lie in lines as well as with another turn: that they are written with few digits is allowed. */
+        boolean fitsLike(Turned other) {
+            return columns.places.length == other.columns.places.length
+                    && rows.places.length == other.rows.places.length
+                    && Math.max(columns.spread, rows.spread) <= 2 * Math.max(other.columns.spread, other.rows.spread);
+        }
+
+        Grid grid(double[] edgesX, double[] edgesY, double x, double y) {
+            double cosine = Math.cos(Math.toRadians(degrees));
+            double sine = Math.sin(Math.toRadians(degrees));
+            double cornerX = x + edgesX[0] * cosine - edgesY[0] * sine;
+            double cornerY = y + edgesX[0] * sine + edgesY[0] * cosine;
+            double near = 3 * Math.max(columns.spread, rows.spread);
+            return new Grid(axis(cornerX, edgesX, near), axis(cornerY, edgesY, near), degrees, 1);
+        }
     }
 
     /** Edges from a corner on: evenly spaced where the widths differ by rounding alone. */
-    private static Axis axis(double corner, double[] edges) {
+    private static Axis axis(double corner, double[] edges, double near) {
         int count = edges.length - 1;
         double step = (edges[count] - edges[0]) / count;
         boolean even = true;
-        for (int i = 0; i < count; i++) {
-            even &= Math.abs(edges[i + 1] - edges[i] - step) <= 1e-3 * step;
-        }
-        double from = tidy(corner, step);
-        if (even) {
-            return Axis.even(from, tidy(step, step), count);
-        }
         double[] placed = new double[edges.length];
-        for (int i = 0; i < edges.length; i++) {
-            placed[i] = tidy(from + edges[i] - edges[0], step);
+        for (int i = 0; i <= count; i++) {
+            placed[i] = corner + edges[i] - edges[0];
+            even &= i == 0 || Math.abs(edges[i] - edges[i - 1] - step) <= 1e-3 * step;
         }
-        return Axis.of(placed);
+        return even
+                ? Axis.even(round(near + 1e-7 * step, corner)[0], round(near / count + 1e-9 * step, step)[0], count)
+                : Axis.of(round(near + 1e-7 * step, placed));
     }
 
-    /** Centres are written with few digits, so that edges worked out from them are rounded to a millionth of a step. */
-    private static double tidy(double value, double step) {
-        double unit = Math.pow(10, Math.floor(Math.log10(step)) - 5);
-        return Numbers.clean(Math.rint(value / unit) * unit);
+    /** {@return numbers with as few decimals as leave each near to what it was} */
+    private static double[] round(double near, double... values) {
+        for (int decimals = 0; decimals < 9; decimals++) {
+            int kept = decimals;
+            double[] rounder =
+                    Arrays.stream(values).map(value -> rounded(value, kept)).toArray();
+            boolean fits = true;
+            for (int i = 0; i < values.length; i++) {
+                fits &= Math.abs(rounder[i] - values[i]) <= near;
+            }
+            if (fits) {
+                return rounder;
+            }
+        }
+        return Arrays.stream(values).map(Numbers::clean).toArray();
     }
 
     /** {@return the turn of the grid in radians, from −45° to 45°} */
@@ -126,35 +160,40 @@ final class CellCentres {
         return turned > Math.PI / 4 ? turned - Math.PI / 2 : turned < -Math.PI / 4 ? turned + Math.PI / 2 : turned;
     }
 
-    /** {@return the different distances, those of one row or column as their mean} */
-    private static double[] apart(double[] distances) {
-        double[] sorted = distances.clone();
-        Arrays.sort(sorted);
-        double span = sorted[sorted.length - 1] - sorted[0];
-        double gap = typicalGap(sorted, span);
-        double[] different = new double[sorted.length];
-        int count = 0;
-        int begin = 0;
-        for (int i = 1; i <= sorted.length; i++) {
-            if (i == sorted.length || sorted[i] - sorted[i - 1] > SAME * gap) {
-                different[count++] = Arrays.stream(sorted, begin, i).sum() / (i - begin);
-                begin = i;
+    /**
+     * Lines in which centres lie.
+     *
+     * @param places where, those of one line as their mean
+     * @param spread how far a centre lies from its line at most
+     */
+    private record Lines(double[] places, double spread) {
+
+        static Lines of(double[] distances) {
+            double[] sorted = distances.clone();
+            Arrays.sort(sorted);
+            double gap = widestGap(sorted);
+            double[] places = new double[sorted.length];
+            double spread = 0;
+            int count = 0;
+            int begin = 0;
+            for (int i = 1; i <= sorted.length; i++) {
+                if (i == sorted.length || sorted[i] - sorted[i - 1] > SAME * gap) {
+                    double mean = Arrays.stream(sorted, begin, i).sum() / (i - begin);
+                    spread = Math.max(spread, Math.max(mean - sorted[begin], sorted[i - 1] - mean));
+                    places[count++] = mean;
+                    begin = i;
+                }
             }
+            return new Lines(Arrays.copyOf(places, count), spread);
         }
-        return Arrays.copyOf(different, count);
     }
 
-    /** {@return the least distance that is more than rounding} */
-    private static double typicalGap(double[] sorted, double span) {
-        double[] gaps = new double[sorted.length];
-        int count = 0;
+    private static double widestGap(double[] sorted) {
+        double widest = 0;
         for (int i = 1; i < sorted.length; i++) {
-            double gap = sorted[i] - sorted[i - 1];
-            if (gap > 1e-5 * span) {
-                gaps[count++] = gap;
-            }
+            widest = Math.max(widest, sorted[i] - sorted[i - 1]);
         }
-        return count == 0 ? span : Arrays.stream(gaps, 0, count).max().orElse(span) / 10;
+        return widest;
     }
 
     /** Where all distances are multiples of the least one, rows without any cell are put in. */
@@ -168,7 +207,7 @@ final class CellCentres {
         double step = span / steps;
         for (double centre : centres) {
             double place = (centre - centres[0]) / step;
-            if (Math.abs(place - Math.rint(place)) > SAME) {
+            if (Math.abs(place - Math.rint(place)) > MULTIPLE) {
                 return centres;
             }
         }

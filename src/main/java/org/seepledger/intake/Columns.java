@@ -122,7 +122,7 @@ final class Columns {
     }
 
     private static Place word(TableLook.Column column, boolean points) {
-        String name = String.join(" ", Vocabulary.words(column.name()));
+        String name = String.join(" ", Vocabulary.words(Vocabulary.withoutUnit(column.name())));
         String whole = name.isEmpty() ? column.name().toLowerCase(Locale.ROOT) : name;
         for (Map.Entry<Place, Set<String>> entry : WORDS.entrySet()) {
             boolean fits = points || !OF_POINTS.contains(entry.getKey());

@@ -75,7 +75,7 @@ final class FieldGuess {
         if (LAYER_WORDS.contains(first.before())) {
             return Means.LAYER;
         }
-        boolean surface = rasters.uses().get(0).role().isSurface();
+        boolean surface = rasters.uses().get(0).role().isSurface() && !Vocabulary.saysSurfaces(rasters.id());
         boolean last = field == rasters.fields().size() - 1;
         if (surface && last && (differs || first.text().length() <= 2)) {
             return Means.LAYER;

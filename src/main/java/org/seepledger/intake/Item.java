@@ -106,6 +106,11 @@ public sealed interface Item {
             return new Table(file, places, replaced(uses, index, use));
         }
 
+        /** {@return the same with a column that is for something else} */
+        public Table withPlace(int column, Place place) {
+            return TableGuess.with(this, replaced(places, column, place));
+        }
+
         /** {@return whether its lines are points} */
         public boolean arePoints() {
             return uses.size() == 1 && uses.get(0).column() < 0;

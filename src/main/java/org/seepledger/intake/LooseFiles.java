@@ -49,10 +49,24 @@ public record LooseFiles(Path root, List<LooseFile> files) {
         List<LooseFile> files = new ArrayList<>();
         for (Path path : paths) {
             String shown = root.relativize(path).toString().replace('\\', '/');
-            files.add(FirstLook.at(path, shown, progress));
+            files.add(leadsOut(path, root) ? link(path, shown) : FirstLook.at(path, shown, progress));
             progress.step();
         }
         return new LooseFiles(root, files);
+    }
+
+    /** A folder is often somebody else's: a link in it could lead to anything. */
+    private static boolean leadsOut(Path path, Path root) {
+        try {
+            return Files.isSymbolicLink(path) && !path.toRealPath().startsWith(root.toRealPath());
+        } catch (IOException e) {
+            return true;
+        }
+    }
+
+    private static LooseFile link(Path path, String shown) {
+        String words = shown + " is a link that leads out of the folder. Bring the file itself.";
+        return new LooseFile.Other(path, shown, 0, LooseFile.Kind.STRANGE, words);
     }
 
     private static void collect(Path brought, Set<Path> paths) {

@@ -30,9 +30,22 @@ public final class Proposal {
             }
         }
         List<Item> all = new ArrayList<>();
-        series.values().forEach(rasters -> all.add(RastersGuess.of(rasters)));
+        series.values().forEach(rasters -> all.addAll(items(rasters)));
         all.addAll(items);
         return new Plan(found.root(), SurfaceOrder.settled(FieldGuess.settled(all)), Wishes.NONE);
+    }
+
+    /** Surfaces that are numbered lie one below the other: each is a thing of its own, in the order of their heights. */
+    private static List<Item> items(List<LooseFile.Raster> rasters) {
+        Item together = RastersGuess.of(rasters);
+        boolean surfaces = Vocabulary.saysSurfaces(together.id())
+                && together.uses().stream().allMatch(use -> use.role().isSurface());
+        if (!surfaces || rasters.size() == 1) {
+            return List.of(together);
+        }
+        List<Item> apart = new ArrayList<>();
+        rasters.forEach(raster -> apart.add(RastersGuess.of(List.of(raster))));
+        return apart;
     }
 
     /** Rasters of another shape or number of bands are no part of a series, whatever their names. */
@@ -42,7 +55,8 @@ public final class Proposal {
     }
 
     private static Item other(LooseFile.Other other) {
-        boolean shapes = other.kind() == LooseFile.Kind.SHAPES;
+        boolean lines = Vocabulary.words(other.shownName()).stream().anyMatch(word -> word.startsWith("transect"));
+        boolean shapes = other.kind() == LooseFile.Kind.SHAPES && !lines;
         Guess guess = shapes
                 ? new Guess(Role.PRISMS, Confidence.FAIR, "A GeoJSON may hold prisms.")
                 : new Guess(Role.NONE, Confidence.HIGH, other.words());

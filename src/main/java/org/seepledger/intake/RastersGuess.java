@@ -29,7 +29,7 @@ final class RastersGuess {
         List<Means> fields = first.fields().stream().map(field -> Means.NOTHING).toList();
         List<Use> uses = bandUses();
         if (uses.isEmpty()) {
-            uses = List.of(whole(id));
+            uses = whole(id);
         }
         return new Item.Rasters(id, files, names, fields, Means.NOTHING, uses);
     }
@@ -66,7 +66,22 @@ final class RastersGuess {
         return uses.size() == bands.size() && bands.size() > 1 && (roles > 1 || surfaces) ? uses : List.of();
     }
 
-    private Use whole(String id) {
+    /** Where a raster speaks of surfaces, each of its bands is one. */
+    private List<Use> whole(String id) {
+        List<BandLook> bands = files.get(0).bands();
+        Use all = all(id);
+        if (files.size() > 1 || bands.size() == 1 || !all.role().isSurface() || !Vocabulary.saysSurfaces(id)) {
+            return List.of(all);
+        }
+        List<Use> uses = new ArrayList<>();
+        for (int band = 0; band < bands.size(); band++) {
+            BandLook look = bands.get(band);
+            uses.add(use(band, String.valueOf(band + 1), stem(id), look.least(), look.greatest()));
+        }
+        return uses;
+    }
+
+    private Use all(String id) {
         double least = Double.NaN;
         double greatest = Double.NaN;
         for (LooseFile.Raster file : files) {

@@ -62,10 +62,21 @@ final class SetText {
             set.put("solutes", solutes);
         }
         remark(set);
-        for (Part part : binder.parts(Role.PRISMS)) {
+        prisms();
+        return set;
+    }
+
+    private void prisms() {
+        List<Part> parts = binder.parts(Role.PRISMS);
+        for (Part part : parts) {
             shelf.other((Item.Other) part.item(), "prisms.geojson");
         }
-        return set;
+        if (parts.size() > 1) {
+            findings.accept(Finding.doubt(
+                    parts.get(1).item(),
+                    "Only one file of prisms can lie beside an aquifer, and "
+                            + parts.get(0).shown() + " does. The window can add the others to it."));
+        }
     }
 
     /** What was said; else what most rasters say. */
@@ -205,6 +216,11 @@ final class SetText {
 
     /** What a set can do without, but a person may have forgotten. */
     private void remark(Map<String, Object> set) {
+        for (Item item : plan.items()) {
+            if (item instanceof Item.Other other && other.file().kind() == LooseFile.Kind.BROKEN) {
+                findings.accept(Finding.doubt(item, other.file().words() + " Until then it is left out."));
+            }
+        }
         boolean steady = binder.times().intervals() == 1;
         if (!steady && !set.containsKey("storage")) {
             findings.accept(Finding.doubt(
@@ -212,8 +228,8 @@ final class SetText {
                     "There is more than one interval and no storage: change in storage, residual and closure error stay"
                             + " unknown. Bring specific yield and specific storage, or type them."));
         }
-        if (!set.containsKey("head")
-                && LayerWishes.waterTables(plan, binder.layers()).contains(true)) {
+        boolean headless = !set.containsKey("head") && binder.parts(Role.HEAD).isEmpty();
+        if (headless && LayerWishes.waterTables(plan, binder.layers()).contains(true)) {
             findings.accept(Finding.doubt(
                     Topic.HEAD,
                     "There are no heads: water-table layers are taken as saturated to their top, and storage is unknown"

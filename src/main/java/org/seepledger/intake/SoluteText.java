@@ -22,7 +22,12 @@ final class SoluteText {
     List<Object> solutes() {
         Map<String, List<Part>> byName = new LinkedHashMap<>();
         for (Part part : binder.parts(Role.CONCENTRATION)) {
-            byName.computeIfAbsent(part.use().name(), name -> new ArrayList<>()).add(part);
+            boolean ofSource =
+                    part.item().uses().stream().anyMatch(use -> use.role().isSource());
+            byName.computeIfAbsent(part.use().name(), name -> new ArrayList<>());
+            if (!ofSource) {
+                byName.get(part.use().name()).add(part);
+            }
         }
         List<Object> solutes = new ArrayList<>();
         byName.forEach((name, parts) -> solutes.add(solute(name, parts)));

@@ -63,8 +63,24 @@ final class SourceText {
         }
         rate(part).ifPresent(rate -> {
             source.put("rate", rate);
+            carried(part).ifPresent(carried -> source.put("concentration", carried));
             sources.add(source);
         });
+    }
+
+    /** Concentrations in the table of a source are those of what it adds. */
+    private Optional<Object> carried(Part source) {
+        Map<String, Object> carried = new LinkedHashMap<>();
+        for (Part part : binder.parts(Role.CONCENTRATION)) {
+            if (part.item().equals(source.item())) {
+                binder.joined(
+                                "concentration of " + part.use().name(),
+                                Optional.empty(),
+                                binder.perLayer(List.of(part), Optional.empty()))
+                        .ifPresent(json -> carried.put(part.use().name(), json));
+            }
+        }
+        return carried.isEmpty() ? Optional.empty() : Optional.of(carried);
     }
 
     /** Values that tell no layers apart enter the uppermost active cell; those of one layer are none in the others. */

@@ -13,8 +13,26 @@ final class TableGuess {
 
     static Item.Table of(LooseFile.Table file) {
         TableLook look = file.look();
-        List<Place> places = Columns.of(look);
-        if (Columns.arePoints(look)) {
+        return of(file, Columns.of(look), Columns.arePoints(look));
+    }
+
+    /** The table with other places; what is made of columns that stay columns of values is kept. */
+    static Item.Table with(Item.Table table, List<Place> places) {
+        boolean placed = places.contains(Place.X) && places.contains(Place.Y);
+        boolean points = placed && (places.contains(Place.RATE) || places.contains(Place.VOLUME));
+        Item.Table fresh = of(table.file(), places, points);
+        List<Use> uses = new ArrayList<>();
+        for (Use use : fresh.uses()) {
+            uses.add(table.uses().stream()
+                    .filter(old -> old.column() == use.column())
+                    .findFirst()
+                    .orElse(use));
+        }
+        return new Item.Table(table.file(), places, uses);
+    }
+
+    private static Item.Table of(LooseFile.Table file, List<Place> places, boolean points) {
+        if (points) {
             return new Item.Table(file, places, List.of(points(file, places)));
         }
         List<Use> uses = new ArrayList<>();
@@ -48,11 +66,22 @@ final class TableGuess {
     private static Use column(LooseFile.Table file, int index, boolean alone) {
         TableLook.Column column = file.look().columns().get(index);
         String stem = stem(file.shownName());
-        Guess guess = RoleGuess.of(column.name(), column.least(), column.greatest());
-        String text = column.name();
+        String text = Vocabulary.withoutUnit(column.name());
+        Guess guess = RoleGuess.of(text, column.least(), column.greatest());
+        boolean concentrations = column.limits() > 0
+                || Vocabulary.of(stem)
+                        .filter(said -> said.role() == Role.CONCENTRATION)
+                        .isPresent();
         if (guess.role() == Role.NONE && alone) {
             guess = RoleGuess.of(stem, column.least(), column.greatest());
-            text = stem;
+            text = guess.role() == Role.CONCENTRATION ? text : stem;
+        } else if (guess.role() == Role.NONE && concentrations) {
+            String why =
+                    column.limits() > 0 ? "Some cells give a limit with <" : "The file's name speaks of concentrations";
+            guess = new Guess(
+                    Role.CONCENTRATION,
+                    Confidence.FAIR,
+                    why + "; " + Wording.range(column.least(), column.greatest()) + ".");
         }
         Use use = UseGuess.of(index, column.name(), text, guess, column.least(), column.greatest(), unit(column));
         boolean fromFile = use.role().isSource()

@@ -203,8 +203,8 @@ final class TimesFinder {
         findings.accept(Finding.fault(
                 Topic.TIMES,
                 "There are " + count + " intervals, and nothing tells how long they are. Say"
-                        + " monthly or yearly with the date of instant 0, every 10 for ten " + unit()
-                        + " each, or list the "
+                        + " monthly or yearly with the date of instant 0, or every 10 where each lasts 10 " + unit()
+                        + ", or list the "
                         + (count + 1) + " instants."));
         List<Double> instants = new ArrayList<>();
         for (int i = 0; i <= count; i++) {

@@ -29,7 +29,8 @@ public record Use(
 
     /** {@return the same in another unit} */
     public Use withUnit(String said) {
-        return new Use(column, part, role, name, said.strip(), layer, turned, guess);
+        Guess sure = new Guess(role, Guess.Confidence.SAID, "You said so.");
+        return new Use(column, part, role, name, said.strip(), layer, turned, sure);
     }
 
     /** {@return the same in another layer} */

@@ -34,18 +34,20 @@ final class UseGuess {
         Optional<String> unit = unitText.flatMap(written -> UnitGuess.read(written, role.amount()))
                 .or(() -> UnitGuess.of(text, role.amount()));
         String reason = guess.reason();
+        boolean bySize = false;
         if (unit.isEmpty() && role == Role.AREAL) {
             unit = UnitGuess.ofRain(Math.max(Math.abs(least), Math.abs(greatest)), "m");
-            reason += unit.map(found -> " By their size they are in " + found + ".")
+            bySize = unit.isPresent();
+            reason += unit.map(found -> " By their size they are in " + found + ": check it.")
                     .orElse("");
         }
         boolean turned = role.isSource() && takes(text) && least >= 0 && greatest > 0;
         if (turned) {
             reason += " What takes water is negative in a budget, so the sign is turned.";
         }
-        String name = role.isNamed() ? Wording.name(role, withoutUnit(text)) : "";
-        return new Use(
-                column, part, role, name, unit.orElse(""), 0, turned, new Guess(role, guess.confidence(), reason));
+        String name = role.isNamed() ? Wording.name(role, spoken(text)) : "";
+        Guess.Confidence confidence = bySize ? Guess.Confidence.LOW : guess.confidence();
+        return new Use(column, part, role, name, unit.orElse(""), 0, turned, new Guess(role, confidence, reason));
     }
 
     /** {@return whether words say that water is taken} */
@@ -53,9 +55,8 @@ final class UseGuess {
         return Vocabulary.words(text).stream().anyMatch(TAKING::contains);
     }
 
-    private static String withoutUnit(String text) {
-        String plain = text.replaceAll("[\\[(].*", "");
-        Optional<Vocabulary.Said> said = Vocabulary.of(plain);
-        return said.map(Vocabulary.Said::phrase).orElse(plain);
+    private static String spoken(String text) {
+        String plain = Vocabulary.withoutUnit(text);
+        return Vocabulary.of(plain).map(Vocabulary.Said::phrase).orElse(plain);
     }
 }

@@ -7,12 +7,16 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 
 /** Words of the trade, and what they say values are. */
 final class Vocabulary {
 
     /** Longer phrases first, since they say more than the words in them. */
     private static final Map<String, Role> PHRASES = phrases();
+
+    private static final Set<String> SURFACES =
+            Set.of("surface", "surfaces", "interface", "interfaces", "horizons", "elevation", "elevations", "elev");
 
     private Vocabulary() {}
 
@@ -197,22 +201,16 @@ final class Vocabulary {
                 "dem",
                 "dtm",
                 "surface",
+                "surfaces",
+                "interfaces",
+                "interface",
+                "horizons",
+                "elevation",
+                "elevations",
+                "elev",
                 "tops",
                 "top");
-        put(
-                phrases,
-                Role.BOTTOM,
-                "bottoms",
-                "bottom",
-                "base",
-                "bedrock",
-                "basement",
-                "floor",
-                "bot",
-                "botm",
-                "rock",
-                "elevation",
-                "elev");
+        put(phrases, Role.BOTTOM, "bottoms", "bottom", "base", "bedrock", "basement", "floor", "bot", "botm", "rock");
         return phrases;
     }
 
@@ -220,6 +218,18 @@ final class Vocabulary {
         for (String phrase : said) {
             phrases.put(phrase, role);
         }
+    }
+
+    /** {@return whether a name speaks of surfaces between layers without saying which} */
+    static boolean saysSurfaces(String name) {
+        List<String> words = words(name);
+        return words.stream().anyMatch(SURFACES::contains)
+                && words.stream().noneMatch(Set.of("ground", "land")::contains);
+    }
+
+    /** {@return a heading without what stands in brackets at its end} */
+    static String withoutUnit(String heading) {
+        return heading.replaceAll("\\s*[\\[(][^\\[(]*[\\])]\\s*$", "");
     }
 
     /** {@return the words of a name, in lower case: letters apart from digits, and {@code bigWords} apart} */

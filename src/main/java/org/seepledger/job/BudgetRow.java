@@ -3,7 +3,9 @@ package org.seepledger.job;
 import java.util.ArrayList;
 import java.util.Collection;
 import java.util.Comparator;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.function.Function;
 import java.util.stream.Collectors;
@@ -24,14 +26,15 @@ import org.seepledger.prism.Prism;
  * A row of a budget, found by its name {@code PRISM/PERIOD/ITEM/LAYER}.
  *
  * <p>Names may hold slashes themselves: the text is held against the names that there are, not split. Where an item's
- * name stands in several groups, {@code PRISM/PERIOD/GROUP/ITEM/LAYER} tells them apart.
+ * name stands in several groups, {@code PRISM/PERIOD/GROUP/ITEM/LAYER} tells them apart. An item over all its layers has
+ * {@code *} for a layer, as totals have; where a total has that name, it is meant.
  *
  * @param prism the prism
  * @param period the period
  * @param item its item
- * @param account the account, as its place among the prism's; -1 for a total
+ * @param accounts the accounts that it adds up, as their places among the prism's; none for a total
  */
-record BudgetRow(Prism prism, Period period, Item item, int account) {
+record BudgetRow(Prism prism, Period period, Item item, List<Integer> accounts) {
 
     private static final int MOST_LISTED = 30;
 
@@ -50,6 +53,10 @@ record BudgetRow(Prism prism, Period period, Item item, int account) {
         static Item of(Account account) {
             String layer = String.valueOf(account.layer() + 1);
             return new Item(account.group(), account.item(), layer, Optional.empty());
+        }
+
+        static Item overAllLayers(Account account) {
+            return new Item(account.group(), account.item(), "*", Optional.empty());
         }
 
         static Item of(Total total) {
@@ -88,13 +95,14 @@ record BudgetRow(Prism prism, Period period, Item item, int account) {
                 fault = none(name, "period", prism.text(), names);
             }
             List<Account> accounts = Trace.accounts(aquifer, prism.named());
-            List<Item> items = items(accounts, aquifer.storageKnowledge() != StorageKnowledge.UNKNOWN);
+            Map<Item, List<Integer>> items = items(accounts, aquifer.storageKnowledge() != StorageKnowledge.UNKNOWN);
             for (Rest<Period> period : ofPeriod) {
-                List<Integer> matching = matching(period.text(), items);
-                matching.forEach(i -> found.add(
-                        new BudgetRow(prism.named(), period.named(), items.get(i), i < accounts.size() ? i : -1)));
+                List<Item> matching = matching(period.text(), items.keySet());
+                matching.forEach(
+                        item -> found.add(new BudgetRow(prism.named(), period.named(), item, items.get(item))));
                 if (matching.isEmpty()) {
-                    List<String> names = items.stream().map(Item::shortName).toList();
+                    List<String> names =
+                            items.keySet().stream().map(Item::shortName).toList();
                     fault = noItem(name, period.text(), names);
                 }
             }
@@ -114,7 +122,7 @@ record BudgetRow(Prism prism, Period period, Item item, int account) {
         return found.get(0);
     }
 
-    private String longName() {
+    String longName() {
         return prism.name() + "/" + period.name() + "/" + item.longName();
     }
 
@@ -122,22 +130,31 @@ record BudgetRow(Prism prism, Period period, Item item, int account) {
         return prism.name() + "/" + period.name() + "/" + item.shortName();
     }
 
-    /** All rows of a period: the accounts, then the totals. */
-    private static List<Item> items(List<Account> accounts, boolean storageKnown) {
-        Stream<Item> totals = Total.rows(storageKnown).stream().map(Item::of);
-        return Stream.concat(accounts.stream().map(Item::of), totals).toList();
-    }
-
-    private static List<Integer> matching(String text, List<Item> items) {
-        List<Integer> matching = new ArrayList<>();
-        for (int i = 0; i < items.size(); i++) {
-            Item item = items.get(i);
-            String asWritten = CsvText.text(item.name()) + "/" + item.layer();
-            if (text.equals(item.shortName()) || text.equals(asWritten) || text.equals(item.longName())) {
-                matching.add(i);
+    /** All rows of a period with the accounts that they add up: the accounts, the totals, items over all layers. */
+    private static Map<Item, List<Integer>> items(List<Account> accounts, boolean storageKnown) {
+        Map<Item, List<Integer>> items = new LinkedHashMap<>();
+        Map<Item, List<Integer>> sums = new LinkedHashMap<>();
+        for (int i = 0; i < accounts.size(); i++) {
+            items.put(Item.of(accounts.get(i)), List.of(i));
+            List<Integer> sum = sums.computeIfAbsent(Item.overAllLayers(accounts.get(i)), item -> new ArrayList<>());
+            if (accounts.get(i).quantified()) {
+                sum.add(i);
             }
         }
-        return matching;
+        Total.rows(storageKnown).forEach(total -> items.put(Item.of(total), List.of()));
+        items.putAll(sums);
+        return items;
+    }
+
+    private static List<Item> matching(String text, Collection<Item> items) {
+        List<Item> matching = items.stream()
+                .filter(item -> text.equals(item.shortName())
+                        || text.equals(CsvText.text(item.name()) + "/" + item.layer())
+                        || text.equals(item.longName()))
+                .toList();
+        List<Item> totals =
+                matching.stream().filter(item -> item.total().isPresent()).toList();
+        return totals.isEmpty() ? matching : totals;
     }
 
     /** What follows a name in a text. */

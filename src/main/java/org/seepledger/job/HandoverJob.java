@@ -110,7 +110,7 @@ public final class HandoverJob {
     private void writePrisms(OutputFolder out, StandIns standIns) throws IOException {
         Path copy = out.file(HandoverRequest.PRISMS);
         if (!request.readsOwnPrisms()) {
-            mustHoldTheDrawing();
+            set.mustHold(request.prisms(), request.drawing());
             Files.copy(request.prisms(), copy);
         } else {
             set.write(copy, request.drawing());
@@ -123,13 +123,6 @@ public final class HandoverJob {
             if (request.readsOwnPrisms()) {
                 standIns.put(raster, request.out().resolve(surface.path()));
             }
-        }
-    }
-
-    private void mustHoldTheDrawing() {
-        if (!set.drawing(request.prisms()).drawing().equals(request.drawing())) {
-            throw new UsageFault("The file " + request.prisms() + " holds other prisms than are drawn: it was changed"
-                    + " meanwhile. Save the drawing, then hand over.");
         }
     }
 

@@ -17,6 +17,7 @@ import org.seepledger.io.Unreadable;
 import org.seepledger.io.aquifer.AquiferFolder;
 import org.seepledger.io.aquifer.AquiferReader;
 import org.seepledger.io.aquifer.AquiferText;
+import org.seepledger.io.prisms.DrawingReader;
 import org.seepledger.progress.Progress;
 
 /**
@@ -24,6 +25,8 @@ import org.seepledger.progress.Progress;
  * writes it whole or not at all. The files that were brought are only read.
  */
 public final class IntakeJob {
+
+    private static final String PRISMS = "prisms.geojson";
 
     private IntakeJob() {}
 
@@ -58,6 +61,7 @@ public final class IntakeJob {
             }
             Path description = scaffold.describe(composition.set());
             try (AquiferFolder opened = AquiferReader.open(description, files)) {
+                readPrisms(opened, files);
                 return InspectJob.text(opened, threads, progress);
             }
         } catch (IOException e) {
@@ -84,11 +88,23 @@ public final class IntakeJob {
                 scaffold.take(copy, progress);
             }
             scaffold.describe(composition.set());
-            InspectJob.run(scaffold.folder(), threads, progress);
+            try (AquiferFolder opened = AquiferReader.open(scaffold.folder())) {
+                readPrisms(opened, Map.of(PRISMS, scaffold.folder().resolve(PRISMS)));
+                InspectJob.text(opened, threads, progress);
+            }
             scaffold.publish(absolute);
         } catch (IOException e) {
             throw new UsageFault("The folder " + target + " cannot be written (" + Unreadable.reason(e)
                     + "). Name a folder where you may write.");
+        }
+    }
+
+    /** Prisms that cannot be read would keep the window from opening the folder. */
+    private static void readPrisms(AquiferFolder opened, Map<String, Path> files) {
+        Path prisms = files.get(PRISMS);
+        if (prisms != null && Files.isRegularFile(prisms)) {
+            int layers = opened.aquifer().layers().size();
+            new DrawingReader(opened.crs(), layers, note -> {}).read(prisms, PRISMS);
         }
     }
 

@@ -5,34 +5,21 @@ import java.util.List;
 import java.util.Optional;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.balance.Trace;
-import org.seepledger.balance.TracedRow;
 import org.seepledger.balance.WaterBalance;
 import org.seepledger.fault.ProgramFault;
 import org.seepledger.fault.UsageFault;
 import org.seepledger.io.result.ResultUnits;
 import org.seepledger.io.result.Statement;
 import org.seepledger.io.result.TraceCsv;
-import org.seepledger.ledger.Entry;
 import org.seepledger.ledger.Ledger;
-import org.seepledger.ledger.PeriodBudget;
-import org.seepledger.ledger.Total;
 import org.seepledger.progress.Progress;
 
 /** Where a number of a budget comes from: the stored values that it rests on, each with its weight. */
 public final class TraceJob {
 
-    /** How far value × weight may add up to something else than the row, as a share of the row's gross flow. */
-    public static final double AGREES = 1e-9;
-
-    /** What rounding of the terms may add to that, as a share of the sum of their magnitudes. */
-    private static final double ROUNDING = 1e-14;
-
     private final TraceRequest request;
     private final Subject subject;
     private final Progress progress;
-
-    /** What a row comes to, in the set's own units. */
-    private record Number(double net, double gross) {}
 
     private TraceJob(TraceRequest request, Subject subject, Progress progress) {
         this.request = request;
@@ -70,8 +57,7 @@ public final class TraceJob {
         Ledger ledger = WaterBalance.of(aquifer, List.of(row.prism()), request.wells(), request.threads(), progress)
                 .ledgers()
                 .get(0);
-        TracedRow traced = traced(row, ledger);
-        Number number = number(row, ledger.budget(row.period()), units);
+        RowNumber number = RowNumber.of(row, ledger, units);
         String title = TraceCsv.TITLE + "\"" + row.shortName() + "\" in \"" + aquifer.name() + "\"";
         Statement statement = subject.statement(title, progress);
         Trace.Sum sum;
@@ -80,53 +66,21 @@ public final class TraceJob {
                     aquifer,
                     row.prism(),
                     request.wells(),
-                    traced,
+                    number.traced(),
                     row.period(),
                     units.rateFactor(),
                     table::line,
                     progress);
         }
-        check(row, number, sum);
+        number.mustBe(sum);
         out.publish();
         return summary(row, number, sum, units);
     }
 
-    private static TracedRow traced(BudgetRow row, Ledger ledger) {
-        Optional<Total> total = row.item().total();
-        if (total.isEmpty()) {
-            return TracedRow.of(row.account(), ledger.accounts());
-        }
-        return TracedRow.of(total.get(), ledger.accounts())
-                .orElseThrow(
-                        () -> new UsageFault(
-                                "\"" + row.shortName()
-                                        + "\" is a ratio of sums and has no weights. Trace \"residual/*\" of the same prism and period."));
-    }
-
-    private static Number number(BudgetRow row, PeriodBudget budget, ResultUnits units) {
-        double perVolume = units.rateFactor() / row.period().duration();
-        Optional<Total> total = row.item().total();
-        double net;
-        double gross;
-        if (total.isEmpty()) {
-            Entry entry = budget.entries().get(row.account());
-            net = entry.net();
-            gross = entry.inflow() + entry.outflow();
-        } else {
-            net = budget.totals().get(total.get());
-            gross = budget.totals().throughput();
-        }
-        if (Double.isNaN(net)) {
-            throw new UsageFault("\"" + row.shortName()
-                    + "\" has no number: it is empty in the budget, whose warnings say why. Trace another row.");
-        }
-        return new Number(net * perVolume, gross * perVolume);
-    }
-
-    private List<String> notes(Number number, ResultUnits units) {
+    private List<String> notes(RowNumber number, ResultUnits units) {
         return List.of(
                 "net_rate: " + number.net() + " " + units.rate()
-                        + "; value x weight over all lines adds up to it, within " + AGREES
+                        + "; value x weight over all lines adds up to it, within " + RowNumber.AGREES
                         + " of the row's gross flow. Lines of the same place add.",
                 "value: as it stands in the file, before scale, offset and unit. weight: what net_rate grows by for each"
                         + " unit of it, all else, saturated thickness among it, as it stands. Flow was given as "
@@ -135,15 +89,7 @@ public final class TraceJob {
                         + " bottom stands in for it.");
     }
 
-    private static void check(BudgetRow row, Number number, Trace.Sum sum) {
-        double difference = Math.abs(sum.value() - number.net());
-        if (!(difference <= AGREES * number.gross() + ROUNDING * sum.magnitude())) {
-            throw new ProgramFault("The trace of \"" + row.shortName() + "\" adds up to " + sum.value()
-                    + ", but the row's net rate is " + number.net() + ".");
-        }
-    }
-
-    private String summary(BudgetRow row, Number number, Trace.Sum sum, ResultUnits units) {
+    private String summary(BudgetRow row, RowNumber number, Trace.Sum sum, ResultUnits units) {
         return "\"" + row.shortName() + "\": net rate " + number.net() + " " + units.rate() + "\n"
                 + "Value × weight over " + sum.lines() + " lines: " + sum.value() + " " + units.rate() + "\n"
                 + "Written to " + request.out() + "\n";

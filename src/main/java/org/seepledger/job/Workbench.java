@@ -6,13 +6,16 @@ import java.util.List;
 import java.util.Optional;
 import java.util.function.Consumer;
 import org.seepledger.aquifer.Aquifer;
+import org.seepledger.aquifer.GriddedValues;
 import org.seepledger.aquifer.KeptCells;
 import org.seepledger.aquifer.Window;
 import org.seepledger.balance.Balance;
 import org.seepledger.balance.Periods;
 import org.seepledger.balance.Span;
+import org.seepledger.balance.Trace;
 import org.seepledger.balance.WaterBalance;
 import org.seepledger.balance.WellRule;
+import org.seepledger.balance.Whereabouts;
 import org.seepledger.fault.UsageFault;
 import org.seepledger.io.DataFolder;
 import org.seepledger.io.aquifer.AquiferFolder;
@@ -30,6 +33,7 @@ import org.seepledger.prism.Prism;
 import org.seepledger.progress.Cancelled;
 import org.seepledger.progress.Progress;
 import org.seepledger.sketch.Drawing;
+import org.seepledger.sketch.Limit;
 import org.seepledger.unit.Measure;
 
 /**
@@ -165,6 +169,23 @@ public final class Workbench implements AutoCloseable {
     }
 
     /**
+     * {@return the elevations of a surface raster, which prisms may then name as their top or bottom; it stays open as long as
+     * the workbench}
+     *
+     * @param file the file that the prisms are kept in, from whose folder the surface is named
+     * @param surface the surface
+     * @throws org.seepledger.fault.DataFault if it is not there, leads out of the folder, or does not match the grid
+     */
+    public GriddedValues surface(Path file, Limit.Surface surface) {
+        return gate.ask(Progress.NONE, progress -> {
+            DataFolder folder = DataFolder.holding(file, file.toString());
+            synchronized (surfaces) {
+                return surfaces.read(folder.resolve(surface.path(), "a top or bottom"), surface.path());
+            }
+        });
+    }
+
+    /**
      * {@return a picture that lies under the map}
      *
      * @param file a GeoTIFF in the aquifer's coordinate system
@@ -184,6 +205,20 @@ public final class Workbench implements AutoCloseable {
      */
     public void write(Path file, Drawing drawing) {
         DrawingWriter.write(file, crs().name(), drawing);
+    }
+
+    /**
+     * Makes sure that a file holds a drawing and nothing else.
+     *
+     * @param file the file
+     * @param drawing the drawing
+     * @throws UsageFault if it does not
+     */
+    public void mustHold(Path file, Drawing drawing) {
+        if (!drawing(file).drawing().equals(drawing)) {
+            throw new UsageFault("The file " + file + " holds other prisms than are drawn: it was changed meanwhile."
+                    + " Save the drawing, then go on.");
+        }
     }
 
     /** The set's folder, for what stands beside its description. */
@@ -230,6 +265,28 @@ public final class Workbench implements AutoCloseable {
     }
 
     /**
+     * Looks where a prism does not close in a period.
+     *
+     * @param prism the prism; what lies beyond the grid is cut off
+     * @param period the period
+     * @param progress told how far the work is
+     * @return the cells furthest from balance, mean over all intervals that the period takes part of
+     * @throws org.seepledger.fault.DataFault if the prism is no polygon or lies off the grid, or the data are wrong
+     * @throws Cancelled if the work was stopped
+     */
+    public Whereabouts whereabouts(Prism prism, Period period, Progress progress) {
+        return gate.ask(progress, until -> {
+            List<Period.Part> parts = period.parts();
+            Span span = new Span(
+                    parts.get(0).interval(), parts.get(parts.size() - 1).interval() + 1);
+            List<Prism> admitted = List.of(reader(note -> {}).admitted(prism));
+            return WaterBalance.of(aquifer(), kept::around, span, admitted, WellRule.POINT, 1, until)
+                    .whereabouts()
+                    .get(0);
+        });
+    }
+
+    /**
      * Balances prisms over the whole record, with what they give to each other.
      *
      * @param prisms at least one prism; what lies beyond the grid is cut off
@@ -257,6 +314,42 @@ public final class Workbench implements AutoCloseable {
     /** {@return what answers questions about solutes} */
     public SoluteBench solutes() {
         return solutes;
+    }
+
+    /**
+     * Traces a row of a prism's budget to the stored values that it rests on.
+     *
+     * @param prism the prism; what lies beyond the grid is cut off
+     * @param row the row, as {@code PRISM/PERIOD/GROUP/ITEM/LAYER}; the layer of a total or of an item over all layers is {@code *}
+     * @param periods the periods that one of is named
+     * @param units the units of results
+     * @param most how many values are kept, those that contribute the most
+     * @param progress told how far the work is
+     * @return the number and its values
+     * @throws UsageFault if there is no such row, it has no number, or it is no sum
+     * @throws org.seepledger.fault.DataFault if the data are wrong
+     * @throws Cancelled if the work was stopped
+     */
+    public TracedNumber trace(
+            Prism prism, String row, List<Period> periods, ResultUnits units, int most, Progress progress) {
+        return gate.ask(progress, until -> {
+            List<Prism> admitted = List.of(reader(note -> {}).admitted(prism));
+            BudgetRow named = BudgetRow.of(row, aquifer(), admitted, periods);
+            Balance balance = WaterBalance.of(aquifer(), admitted, WellRule.POINT, threads(), until);
+            RowNumber number = RowNumber.of(named, balance.ledgers().get(0), units);
+            LargestLines lines = new LargestLines(most);
+            Trace.Sum sum = Trace.of(
+                    aquifer(),
+                    named.prism(),
+                    WellRule.POINT,
+                    number.traced(),
+                    named.period(),
+                    units.rateFactor(),
+                    lines,
+                    until);
+            number.mustBe(sum);
+            return new TracedNumber(row, named.period(), number.net(), units, sum.value(), sum.lines(), lines.lines());
+        });
     }
 
     /**

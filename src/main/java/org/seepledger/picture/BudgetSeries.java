@@ -27,6 +27,7 @@ public final class BudgetSeries {
     private static final double RIGHT = 10;
     private static final double STRIP = 46;
     private static final double LOWEST = 56;
+    private static final double ROOMY = 640;
 
     private final List<PeriodBudget> budgets;
     private final SeriesValues values;
@@ -56,7 +57,7 @@ public final class BudgetSeries {
         this.width = width;
         this.top = 26;
         this.bottom = top + plotHeight(height);
-        this.stripTop = bottom + 50;
+        this.stripTop = bottom + (isOneLine() ? 26 : 50);
         this.end = values.closes() ? stripTop - 4 : stripTop + STRIP;
         double greatest = IntStream.range(0, values.count())
                 .mapToDouble(values::up)
@@ -85,9 +86,14 @@ public final class BudgetSeries {
                 marks(marked));
     }
 
+    /** A residual that has no strip is told beside the key of losses, where there is room. */
+    private boolean isOneLine() {
+        return values.closes() && width >= ROOMY;
+    }
+
     /** How high gains and losses are drawn, as far as what else there is leaves room. */
     private double plotHeight(OptionalDouble height) {
-        double rest = top + (values.closes() ? 72 : 76 + STRIP);
+        double rest = top + (isOneLine() ? 48 : values.closes() ? 72 : 76 + STRIP);
         return height.isPresent() ? Math.max(LOWEST, height.getAsDouble() - rest) : width >= 600 ? 230 : 190;
     }
 
@@ -161,7 +167,8 @@ public final class BudgetSeries {
             above.filled(STORAGE, "storage gives");
             below.filled(STORAGE, "storage takes");
         }
-        new Key(left, right, stripTop - 22, marks).filled(RESIDUAL, aboutResidual());
+        Key residual = isOneLine() ? below : new Key(left, right, stripTop - 22, marks);
+        residual.filled(RESIDUAL, aboutResidual());
         axis.draw(left, right, false, marks);
         if (!values.closes()) {
             strip.draw(left, right, true, marks);

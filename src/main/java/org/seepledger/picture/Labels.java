@@ -12,6 +12,7 @@ public final class Labels {
     private static final double GAP = 1.5;
 
     private final Box frame;
+    private final double gap;
     private final List<Box> taken = new ArrayList<>();
 
     /**
@@ -20,7 +21,18 @@ public final class Labels {
      * @param frame what labels must not reach beyond
      */
     public Labels(Box frame) {
+        this(frame, GAP);
+    }
+
+    /**
+     * Begins with an empty page.
+     *
+     * @param frame what labels must not reach beyond
+     * @param gap how far they keep from each other and from what is kept free, in logical pixels
+     */
+    public Labels(Box frame, double gap) {
         this.frame = frame;
+        this.gap = gap;
     }
 
     /**
@@ -41,7 +53,7 @@ public final class Labels {
      */
     public boolean place(List<Mark.Text> choices, List<Mark> marks) {
         for (Mark.Text choice : choices) {
-            Box box = Lettering.box(choice).inset(-GAP);
+            Box box = Lettering.box(choice).inset(-gap);
             if (frame.holds(box) && taken.stream().noneMatch(box::meets)) {
                 taken.add(box);
                 marks.add(choice);

@@ -6,6 +6,7 @@ package org.seepledger.picture;
  */
 public final class Lettering {
 
+    private static final double BOLD = 1.1;
     private static final String NARROW = "iIjlt.,:;'|!()[]/ \u202f";
     private static final String WIDE = "mwMW%@—";
 
@@ -32,7 +33,7 @@ public final class Lettering {
      * @param text the text; its angle is not looked at
      */
     public static Box box(Mark.Text text) {
-        double width = width(text.words(), text.size());
+        double width = width(text.words(), text.size()) * (text.bold() ? BOLD : 1);
         double left = switch (text.anchor()) {
             case START -> text.x();
             case MIDDLE -> text.x() - width / 2;

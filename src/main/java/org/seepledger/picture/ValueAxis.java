@@ -29,7 +29,12 @@ final class ValueAxis {
         this.greatest = to > from ? to : 1;
         this.upper = upper;
         this.high = high;
-        this.ticks = Ticks.within(this.least, this.greatest, Math.max(3, (int) (high / 26)));
+        this.ticks = Ticks.within(this.least, this.greatest, most(high));
+    }
+
+    /** Room enough to read them, and as few as will do where there is little. */
+    private static int most(double high) {
+        return Math.max((int) (high / 26), Math.max(3, Math.min(5, (int) (high / 13))));
     }
 
     double y(double value) {

@@ -18,8 +18,19 @@ public record CellPlace(double x, double y) {
      * @param spot the cell
      */
     public static CellPlace of(Grid grid, HotSpot spot) {
-        int fromSouth = grid.flipped(spot.row());
-        double x = grid.x().edge(spot.column()) + 0.5 * grid.x().size(spot.column());
+        return of(grid, spot.row(), spot.column());
+    }
+
+    /**
+     * {@return where a cell's centre lies}
+     *
+     * @param grid the grid
+     * @param row its row, from 0 in the north
+     * @param column its column, from 0
+     */
+    public static CellPlace of(Grid grid, int row, int column) {
+        int fromSouth = grid.flipped(row);
+        double x = grid.x().edge(column) + 0.5 * grid.x().size(column);
         double y = grid.y().edge(fromSouth) + 0.5 * grid.y().size(fromSouth);
         return new CellPlace(grid.mapX(x, y), grid.mapY(x, y));
     }

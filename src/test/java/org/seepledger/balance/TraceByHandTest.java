@@ -91,7 +91,7 @@ class TraceByHandTest {
 
     private static Map<String, Double> ofRow(Aquifer aquifer, Prism prism, WellRule rule, String item) {
         List<Account> accounts = Trace.accounts(aquifer, prism);
-        TracedRow row = TracedRow.of(account(accounts, item, 0), accounts);
+        TracedRow row = TracedRow.of(List.of(account(accounts, item, 0)), accounts);
         return weights(aquifer, prism, rule, row, new Periods(aquifer.times()).record());
     }
 
@@ -216,7 +216,8 @@ class TraceByHandTest {
                 }
             }
             for (int a = 0; a < accounts.size(); a++) {
-                Map<String, Double> weights = weights(plain, TURNED, WellRule.POINT, TracedRow.of(a, accounts), period);
+                Map<String, Double> weights =
+                        weights(plain, TURNED, WellRule.POINT, TracedRow.of(List.of(a), accounts), period);
                 for (int i = 0; i < grown.length; i++) {
                     String place = "step " + i / 24 + ", layer " + i / 12 % 2 + ", row " + (i % 12 / 4 + 1) + ", col "
                             + (i % 4 + 1);
@@ -243,7 +244,7 @@ class TraceByHandTest {
             for (int a = 0; a < ledger.accounts().size(); a++) {
                 double[] sum = new double[1];
                 Trace.Lines lines = (file, place, value, weight) -> sum[0] += value * weight;
-                TracedRow row = TracedRow.of(a, ledger.accounts());
+                TracedRow row = TracedRow.of(List.of(a), ledger.accounts());
                 Trace.Sum traced = Trace.of(world.aquifer, prism, WellRule.POINT, row, record, 2, lines, Progress.NONE);
                 double rate = 2 * ledger.budget(record).entries().get(a).net() / record.duration();
                 assertThat(sum[0])

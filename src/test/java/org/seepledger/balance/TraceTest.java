@@ -122,7 +122,14 @@ class TraceTest {
             for (int i = 0; i < accounts.size(); i++) {
                 Entry entry = budget.entries().get(i);
                 if (entry.account().quantified()) {
-                    check(aquifer, prism, rule, TracedRow.of(i, accounts), period, entry.net(), accounts.get(i));
+                    check(
+                            aquifer,
+                            prism,
+                            rule,
+                            TracedRow.of(List.of(i), accounts),
+                            period,
+                            entry.net(),
+                            accounts.get(i));
                 }
             }
             for (Total total : Total.rows(ledger.storageKnown())) {

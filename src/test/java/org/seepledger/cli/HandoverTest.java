@@ -5,7 +5,6 @@ import static org.assertj.core.api.Assertions.assertThat;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
@@ -87,28 +86,9 @@ class HandoverTest {
                 .isEmpty();
     }
 
-    /** The commands of a script as a shell takes them apart. */
-    private List<List<String>> words(String script) throws IOException {
-        Path file = Files.writeString(
-                folder.resolve("script.sh"), "seepledger() { printf '%s\\n' \"$@\"; echo ----; }\n" + script + "\n");
-        Process shell = new ProcessBuilder("sh", file.toString())
-                .redirectErrorStream(true)
-                .start();
-        List<List<String>> commands = new ArrayList<>(List.of(new ArrayList<>()));
-        for (String word : new String(shell.getInputStream().readAllBytes(), java.nio.charset.StandardCharsets.UTF_8)
-                .split("\n")) {
-            if (word.equals("----")) {
-                commands.add(new ArrayList<>());
-            } else {
-                commands.get(commands.size() - 1).add(word);
-            }
-        }
-        return commands.subList(0, commands.size() - 1);
-    }
-
     /** Runs commands with their results put elsewhere, and holds them against what was handed over. */
     private void assertSame(Path out, String script) throws IOException {
-        for (List<String> command : words(script)) {
+        for (List<String> command : ShellWords.of(folder, script)) {
             int place = command.indexOf("--out") + 1;
             Path handed = Path.of(command.get(place));
             assertThat(handed.getParent()).isEqualTo(out);

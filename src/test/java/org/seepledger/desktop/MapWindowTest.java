@@ -121,6 +121,7 @@ class MapWindowTest {
         window.robot.clickOn("Old gravel");
         assertThat(window.assembly().session().layer().get()).isEqualTo(2);
         window.settle();
+        window.robot.press(KeyCode.L).release(KeyCode.L);
         TextField from = window.robot.lookup("#range-from").queryAs(TextField.class);
         window.robot.doubleClickOn(from).press(KeyCode.SHORTCUT, KeyCode.A).release(KeyCode.A, KeyCode.SHORTCUT);
         window.robot.write("90");

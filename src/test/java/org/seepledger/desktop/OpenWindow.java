@@ -32,7 +32,7 @@ public final class OpenWindow implements AutoCloseable {
     public final FxRobot robot = new FxRobot();
 
     /** What the machine answers. */
-    public final GivenAnswers answers = new GivenAnswers();
+    public final GivenAnswers answers;
 
     private final BackgroundTasks tasks = new BackgroundTasks(Platform::runLater);
     private Assembly assembly;
@@ -45,11 +45,24 @@ public final class OpenWindow implements AutoCloseable {
      * @param height of the scene, in logical pixels
      */
     public OpenWindow(double width, double height) {
+        this(width, height, new GivenAnswers());
+    }
+
+    /**
+     * Opens the window again on the same machine.
+     *
+     * @param width of the scene, in logical pixels
+     * @param height of the scene, in logical pixels
+     * @param answers what the machine answers and has kept
+     */
+    OpenWindow(double width, double height, GivenAnswers answers) {
+        this.answers = answers;
         try {
             stage = FxToolkit.registerPrimaryStage();
             FxToolkit.setupFixture(() -> {
                 assembly = new Assembly(
-                        new Assembly.Outside(tasks, answers, answers, answers, answers, answers), List.of(Path.of("")));
+                        new Assembly.Outside(tasks, answers, answers, answers, answers, answers, answers),
+                        List.of(Path.of("")));
                 stage.setScene(assembly.scene());
                 stage.setX(0);
                 stage.setY(0);

@@ -61,7 +61,8 @@ public final class LooseValley {
                     case POINTS -> "public supply";
                     default -> use.name();
                 };
-                plan = plan.with(i, plan.items().get(i).with(u, use.withName(name)));
+                Use named = use.role() == Role.AREAL ? use.withUnit("mm/yr") : use.withName(name);
+                plan = plan.with(i, plan.items().get(i).with(u, named));
             }
         }
         return plan;

@@ -16,9 +16,16 @@ import org.junit.jupiter.api.io.TempDir;
 import org.seepledger.fault.DataFault;
 import org.seepledger.fault.UsageFault;
 import org.seepledger.intake.Composition;
+import org.seepledger.intake.Item;
+import org.seepledger.intake.LooseFolder;
 import org.seepledger.intake.LooseValley;
 import org.seepledger.intake.Plan;
 import org.seepledger.intake.Proposal;
+import org.seepledger.intake.Role;
+import org.seepledger.intake.Use;
+import org.seepledger.intake.Wishes;
+import org.seepledger.io.aquifer.AquiferFolder;
+import org.seepledger.io.aquifer.AquiferReader;
 import org.seepledger.io.result.FileRecord;
 import org.seepledger.progress.Cancelled;
 import org.seepledger.progress.Progress;
@@ -62,8 +69,12 @@ class IntakeJobTest {
     }
 
     private List<String> budget(Path set) throws IOException {
+        return budget(set, VALLEY.resolve("prisms.geojson"));
+    }
+
+    private List<String> budget(Path set, Path prisms) throws IOException {
         Path out = folder.resolve("budget of " + set.getFileName());
-        BalanceJob.run(Requests.byInterval(set, VALLEY.resolve("prisms.geojson"), out), Progress.NONE);
+        BalanceJob.run(Requests.byInterval(set, prisms, out), Progress.NONE);
         return Rows.text(out.resolve("budget.csv"));
     }
 
@@ -148,9 +159,7 @@ class IntakeJobTest {
         }
         Map<String, FileRecord> before = contents(place);
         Plan plan = LooseValley.corrected(Proposal.of(IntakeJob.look(List.of(place), Progress.NONE)));
-        plan = plan.with(plan.wishes()
-                .with(org.seepledger.intake.Wishes.Topic.TIMES, "monthly")
-                .with(org.seepledger.intake.Wishes.Topic.START, "2021-10-01"));
+        plan = plan.with(plan.wishes().with(Wishes.Topic.TIMES, "monthly").with(Wishes.Topic.START, "2021-10-01"));
         Composition composition = Composition.of(plan, true);
         assertThat(composition.obstacles()).isEmpty();
         IntakeJob.describe(composition, place, 2, Progress.NONE);
@@ -170,5 +179,80 @@ class IntakeJobTest {
                 .contains("results/heads/Head_L1_T00.tif would have to be counted as 0, not 00.")
                 .anyMatch(words -> words.startsWith("climate/recharge_2021-10.tif"));
         assertThat(composition.isSound()).isFalse();
+    }
+
+    private Plan looseOneLayer() {
+        Path place = folder.resolve("one");
+        LooseFolder one = new LooseFolder(place)
+                .raster("top.tif", 20)
+                .raster("bottom.tif", 0)
+                .raster("K.tif", 5)
+                .raster("head.tif", (row, column) -> 15 + 0.1 * column)
+                .raster("active.tif", (row, column) -> column == 0 ? 0 : 1)
+                .raster("recharge_mm_yr.tif", 200)
+                .text("wells.csv", "\uFEFFwell;east;x;y;layer;start;end;Q (m3/h)", "W 1;;1025;2015;0;01.10.2021;;2,5")
+                .text("prisms.geojson", "{\"type\": \"FeatureCollection\", \"features\": []}");
+        Plan plan = one.plan();
+        return LooseFolder.said(plan, Wishes.Topic.START, "2021-10-01");
+    }
+
+    @Test
+    void headingsDatesSignsAndMasksAreMendedInTheCopy() throws IOException {
+        IntakeJob.write(Composition.of(looseOneLayer(), false), target, 1, Progress.NONE);
+        assertThat(Files.readAllLines(target.resolve("wells.csv")))
+                .containsExactly("name;x;y;layer;from;to;rate [m3/h]", "W 1;1025;2015;1;2021-10-01;;-2,5");
+        try (AquiferFolder opened = AquiferReader.open(target)) {
+            double[] values = new double[20];
+            opened.quantities().stream()
+                    .filter(quantity -> quantity.name().equals("flow conductivity"))
+                    .findFirst()
+                    .orElseThrow()
+                    .values()
+                    .read(0, 0, LooseFolder.GRID.window(), values, 0);
+            assertThat(values[0]).isNaN();
+            assertThat(values[1]).isEqualTo(5);
+        }
+        assertThat(target.resolve("prisms.geojson")).exists();
+    }
+
+    @Test
+    void prismsThatCannotBeReadAreRefusedBeforeAnythingIsWritten() throws IOException {
+        looseOneLayer();
+        Files.writeString(folder.resolve("one/prisms.geojson"), "{\"type\": \"Feature\"}");
+        Plan plan = LooseFolder.said(
+                Proposal.of(IntakeJob.look(List.of(folder.resolve("one")), Progress.NONE)),
+                Wishes.Topic.START,
+                "2021-10-01");
+        assertThatThrownBy(() -> IntakeJob.write(Composition.of(plan, false), target, 1, Progress.NONE))
+                .isInstanceOf(DataFault.class)
+                .hasMessageContaining("prisms.geojson");
+        assertThat(target).doesNotExist();
+    }
+
+    @Test
+    void theTerracesTablesTellEvenItsUnevenTurnedGrid() throws IOException {
+        Path terrace = Path.of("sample-aquifers/terrace");
+        Path place = folder.resolve("tables");
+        Files.createDirectories(place);
+        try (Stream<Path> files = Files.list(terrace)) {
+            for (Path file :
+                    files.filter(file -> file.toString().endsWith(".csv")).toList()) {
+                Files.copy(file, place.resolve(file.getFileName()));
+            }
+        }
+        Plan plan = Proposal.of(IntakeJob.look(List.of(place), Progress.NONE));
+        for (int i = 0; i < plan.items().size(); i++) {
+            Item item = plan.items().get(i);
+            for (int u = 0; u < item.uses().size(); u++) {
+                Use use = item.uses().get(u);
+                if (use.role() == Role.CELLS) {
+                    plan = plan.with(i, item.with(u, use.withName("river exchange")));
+                }
+            }
+        }
+        plan = LooseFolder.said(plan, Wishes.Topic.START, "2023-01-01");
+        IntakeJob.write(Composition.of(plan, false), target, 2, Progress.NONE);
+        Path prisms = terrace.resolve("prisms.geojson");
+        assertThat(budget(target, prisms)).isEqualTo(budget(terrace, prisms));
     }
 }

@@ -2,6 +2,7 @@ package org.seepledger.job;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
+import static org.assertj.core.api.Assertions.within;
 
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
@@ -61,6 +62,25 @@ class TraceJobTest {
     void addsUpToEachRowOfFaceFlows() throws IOException {
         SmallSets.faces(folder.resolve("set"));
         assertThat(traceAll()).isGreaterThan(15);
+    }
+
+    @Test
+    void anItemOverAllLayersAddsUpItsRows() throws IOException {
+        SmallSets.heads(folder.resolve("set"));
+        traceAll();
+        double rows = 0;
+        for (CSVRecord row : Rows.of(folder.resolve("budget/budget.csv"))) {
+            if (row.get("prism").equals("a/b") && row.get("item").equals("river/bank")) {
+                rows += Double.parseDouble(row.get("net_rate"));
+            }
+        }
+        trace("a/b/record/river/bank/*", true);
+        double sum = 0;
+        for (CSVRecord line : Rows.of(folder.resolve("trace.csv"))) {
+            sum += Double.parseDouble(line.get("value")) * Double.parseDouble(line.get("weight"));
+        }
+        assertThat(rows).isNotZero();
+        assertThat(sum).isCloseTo(rows, within(1e-9 * Math.abs(rows)));
     }
 
     private int traceAll() throws IOException {

@@ -2,6 +2,7 @@ package org.seepledger.desktop.closure;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyStringProperty;
 import javafx.beans.property.ReadOnlyStringWrapper;
@@ -14,6 +15,7 @@ import org.seepledger.desktop.budget.Reading;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.task.PaneState;
+import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.io.result.PrismBudget;
 import org.seepledger.io.result.ResultUnits;
@@ -40,6 +42,7 @@ public final class ClosureModel {
     private final ObservableList<String> notes = FXCollections.observableArrayList();
     private final ObservableList<String> leads = FXCollections.observableArrayList();
     private final ObservableList<Spot> spots = FXCollections.observableArrayList();
+    private final PeriodSpots ofPeriod;
     private final ReadOnlyStringWrapper belongs = new ReadOnlyStringWrapper("");
 
     /**
@@ -48,14 +51,17 @@ public final class ClosureModel {
      * @param session what the window looks at
      * @param live the budgets
      * @param reading how figures are read
+     * @param tasks looks for the cells of the period shown
      */
-    public ClosureModel(Session session, LiveBudget live, Reading reading) {
+    public ClosureModel(Session session, LiveBudget live, Reading reading, Tasks tasks) {
         this.session = session;
         this.live = live;
         this.reading = reading;
+        this.ofPeriod = new PeriodSpots(session, live, reading, tasks);
         live.whole().addListener((whole, before, after) -> show());
         session.selected().addListener((selected, before, after) -> show());
         reading.changes().addListener((changes, before, after) -> show());
+        session.interval().addListener((interval, before, after) -> findOfPeriod());
         show();
     }
 
@@ -82,6 +88,16 @@ public final class ClosureModel {
     /** {@return the cells furthest from balance, the furthest first; empty where the budget closes to rounding} */
     public ObservableList<Spot> spots() {
         return spots;
+    }
+
+    /** {@return the same of the period that is shown, where that is shorter than the record} */
+    public ObservableList<Spot> spotsOfPeriod() {
+        return ofPeriod.spots();
+    }
+
+    /** {@return what that period is called; empty where there are no such cells} */
+    public ReadOnlyStringProperty period() {
+        return ofPeriod.period();
     }
 
     /** {@return which geometry and time the sentences belong to} */
@@ -121,7 +137,7 @@ public final class ClosureModel {
 
     /** Asks the map to show imbalance. */
     public void showImbalance() {
-        spots.stream()
+        Stream.concat(spots.stream(), spotsOfPeriod().stream())
                 .findFirst()
                 .ifPresent(spot -> session.layer().set(spot.cell().layer()));
         session.demand().set(Session.Demand.SHOW_IMBALANCE);
@@ -154,6 +170,14 @@ public final class ClosureModel {
                 show(set.get(), record.get(), prism);
             }
         }
+        findOfPeriod();
+    }
+
+    private void findOfPeriod() {
+        session.set().get().ifPresent(set -> {
+            ResultUnits units = reading.inUse(set);
+            ofPeriod.find(cell -> spot(set, cell, units));
+        });
     }
 
     private void show(OpenSet set, RecordBudget record, int prism) {

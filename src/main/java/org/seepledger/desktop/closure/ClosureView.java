@@ -51,6 +51,7 @@ public final class ClosureView extends BorderPane {
         model.belongs().addListener((text, before, after) -> fill());
         model.points().addListener((ListChangeListener<Answer.Point>) change -> fill());
         model.spots().addListener((ListChangeListener<Spot>) change -> fill());
+        model.spotsOfPeriod().addListener((ListChangeListener<Spot>) change -> fill());
         fill();
     }
 
@@ -96,23 +97,31 @@ public final class ClosureView extends BorderPane {
     }
 
     private void addPlaces() {
-        if (model.spots().isEmpty()) {
-            return;
-        }
-        Label title = words(Words.of("closure.where"), "sl-question");
-        Button imbalance = new Button(Words.of("closure.imbalance"));
-        imbalance.setId("closure-imbalance");
-        imbalance.setOnAction(pressed -> model.showImbalance());
-        sheet.getChildren().addAll(title, imbalance);
-        for (int i = 0; i < model.spots().size(); i++) {
-            sheet.getChildren().add(row(model.spots().get(i), i + 1));
-        }
+        addPlaces(Words.of("closure.where"), model.spots(), "closure-cell-");
         model.leads().forEach(lead -> sheet.getChildren().add(words(lead, "sl-answer")));
+        addPlaces(
+                Words.of("closure.where.period", model.period().get()), model.spotsOfPeriod(), "closure-period-cell-");
     }
 
-    private Node row(Spot spot, int number) {
+    private void addPlaces(String title, List<Spot> spots, String id) {
+        if (spots.isEmpty()) {
+            return;
+        }
+        sheet.getChildren().add(words(title, "sl-question"));
+        if (sheet.lookup("#closure-imbalance") == null) {
+            Button imbalance = new Button(Words.of("closure.imbalance"));
+            imbalance.setId("closure-imbalance");
+            imbalance.setOnAction(pressed -> model.showImbalance());
+            sheet.getChildren().add(imbalance);
+        }
+        for (int i = 0; i < spots.size(); i++) {
+            sheet.getChildren().add(row(spots.get(i), id + (i + 1)));
+        }
+    }
+
+    private Node row(Spot spot, String id) {
         Hyperlink way = new Hyperlink(spot.where());
-        way.setId("closure-cell-" + number);
+        way.setId(id);
         way.setOnAction(pressed -> model.goTo(spot));
         Region gap = new Region();
         HBox.setHgrow(gap, Priority.ALWAYS);

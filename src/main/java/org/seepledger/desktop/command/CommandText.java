@@ -2,6 +2,7 @@ package org.seepledger.desktop.command;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.regex.Pattern;
 
@@ -69,6 +70,15 @@ public final class CommandText {
     /** {@return a word that a shell takes as it is} */
     private static String quoted(String word) {
         return PLAIN.matcher(word).matches() ? word : "'" + word.replace("'", "'\\''") + "'";
+    }
+
+    /**
+     * {@return a choice as it is typed}
+     *
+     * @param choice the choice
+     */
+    public static String word(Enum<?> choice) {
+        return choice.name().toLowerCase(Locale.ROOT).replace('_', '-');
     }
 
     /** {@return the command, its lines joined by backslashes} */

@@ -1,10 +1,13 @@
 package org.seepledger.desktop.draw;
 
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.function.Function;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
+import java.util.stream.Stream;
 import org.seepledger.desktop.words.Words;
+import org.seepledger.sketch.Buffer;
 import org.seepledger.sketch.Limit;
 import org.seepledger.sketch.Reach;
 import org.seepledger.sketch.Refusal;
@@ -16,9 +19,11 @@ final class CardModel {
     private static final Pattern LAYERS = Pattern.compile("\\s*(\\d{1,6})\\s*(?:(?:-|–|to)\\s*(\\d{1,6}))?\\s*");
 
     private final DraftModel model;
+    private final LidSurfaces surfaces;
 
-    CardModel(DraftModel model) {
+    CardModel(DraftModel model, LidSurfaces surfaces) {
         this.model = model;
+        this.surfaces = surfaces;
     }
 
     void rename(String name) {
@@ -61,32 +66,72 @@ final class CardModel {
         return new Reach.Layers(first - 1, last - 1);
     }
 
-    /** Elevations of top and bottom; nothing for the grid's own. */
+    /** Elevations or surfaces of top and bottom; nothing for the grid's own. A surface that is not known yet is read first. */
     void lids(String top, String bottom) {
-        if (top.isBlank() && bottom.isBlank()) {
+        Optional<Limit> upper = lid(top);
+        Optional<Limit> lower = lid(bottom);
+        Optional<Limit.Surface> unread = Stream.of(upper, lower)
+                .flatMap(Optional::stream)
+                .filter(Limit.Surface.class::isInstance)
+                .map(Limit.Surface.class::cast)
+                .filter(surface -> !model.knows(surface))
+                .findFirst();
+        if (unread.isPresent()) {
+            surfaces.read(unread.get(), () -> lids(top, bottom));
+        } else if (upper.isEmpty() && lower.isEmpty()) {
             change(
                     "step.reach",
                     shape -> shape.reach() instanceof Reach.Between ? shape.reaching(new Reach.Whole()) : shape);
         } else {
-            change("step.reach", shape -> shape.reaching(new Reach.Between(lid(top), lid(bottom))));
+            change("step.reach", shape -> shape.reaching(new Reach.Between(upper, lower)));
         }
     }
 
-    /** A surface can be named only where a file has brought it, since its raster must be open. */
-    private Optional<Limit> lid(String text) {
-        if (text.isBlank()) {
-            return Optional.empty();
-        }
+    private static Optional<Limit> lid(String text) {
+        String typed = text.strip();
+        OptionalDouble elevation = number(typed);
+        return typed.isEmpty()
+                ? Optional.empty()
+                : Optional.of(
+                        elevation.isPresent()
+                                ? new Limit.Elevation(elevation.getAsDouble())
+                                : new Limit.Surface(typed));
+    }
+
+    private static OptionalDouble number(String text) {
         try {
-            return Optional.of(
-                    new Limit.Elevation(Double.parseDouble(text.strip().replace('−', '-'))));
+            return OptionalDouble.of(Double.parseDouble(text.strip().replace('−', '-')));
         } catch (NumberFormatException e) {
-            Limit.Surface surface = new Limit.Surface(text.strip());
-            if (!model.knows(surface)) {
-                throw new Refusal(Words.of("card.lid.form"));
-            }
-            return Optional.of(surface);
+            return OptionalDouble.empty();
         }
+    }
+
+    void chooseTop(String bottom) {
+        surfaces.choose(path -> lids(path, bottom));
+    }
+
+    void chooseBottom(String top) {
+        surfaces.choose(path -> lids(top, path));
+    }
+
+    /** Makes a new prism of all within a distance of the selected one, or of what is farther than that from its sides. */
+    boolean buffer(String text) {
+        Optional<Shape> shape = model.selected();
+        OptionalDouble distance = number(text);
+        if (shape.isEmpty() || distance.isEmpty()) {
+            model.session().status().set(Words.of(shape.isEmpty() ? "tool.needs" : "buffer.number"));
+            return false;
+        }
+        String name =
+                model.drawing().freeName(Words.of("buffer.name", shape.get().name()));
+        boolean made = model.step(
+                "step.buffer",
+                drawing ->
+                        drawing.with(shape.get().named(name).madeOf(Buffer.of(shape.get(), distance.getAsDouble()))));
+        if (made) {
+            model.session().selected().set(name);
+        }
+        return made;
     }
 
     void reorder(int by) {

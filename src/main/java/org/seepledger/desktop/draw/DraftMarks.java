@@ -81,9 +81,9 @@ final class DraftMarks {
     private void cross(Place place) {
         double x = x(place);
         double y = y(place);
-        haloed(regular(x, y, 9, 24, 0), Ink.Token.LOSS, 2, true);
-        haloed(new double[] {x - 5, y - 5, x + 5, y + 5}, Ink.Token.LOSS, 2);
-        haloed(new double[] {x - 5, y + 5, x + 5, y - 5}, Ink.Token.LOSS, 2);
+        haloed(regular(x, y, 9, 24, 0), ACCENT, 2, true);
+        haloed(new double[] {x - 5, y - 5, x + 5, y + 5}, ACCENT, 2);
+        haloed(new double[] {x - 5, y + 5, x + 5, y - 5}, ACCENT, 2);
     }
 
     void stroke(List<Place> places, Optional<Place> pointer, boolean closes) {

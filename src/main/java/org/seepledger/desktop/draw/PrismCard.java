@@ -8,6 +8,7 @@ import javafx.geometry.Pos;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.control.TextField;
+import javafx.scene.control.Tooltip;
 import javafx.scene.layout.ColumnConstraints;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.HBox;
@@ -26,11 +27,12 @@ final class PrismCard extends VBox {
     private final TextField top = new TextField();
     private final TextField bottom = new TextField();
     private final TextField boundary = new TextField();
+    private final TextField buffer = new TextField();
     private final CardModel card;
 
-    PrismCard(DraftModel model, DraftHand hand) {
+    PrismCard(DraftModel model, DraftHand hand, LidSurfaces surfaces) {
         this.model = model;
-        this.card = new CardModel(model);
+        this.card = new CardModel(model, surfaces);
         setId("card");
         getStyleClass().add("sl-float");
         setMaxSize(USE_PREF_SIZE, USE_PREF_SIZE);
@@ -47,6 +49,11 @@ final class PrismCard extends VBox {
         row(rows, "card.bottom", "card-bottom", bottom, text -> card.lids(top.getText(), text));
         row(rows, "card.boundary", "card-boundary", boundary, hand::nameBoundary);
         boundary.setPromptText(Words.of("card.boundary.prompt"));
+        rows.add(chooser("card-top-file", () -> card.chooseTop(bottom.getText())), 2, 3);
+        rows.add(chooser("card-bottom-file", () -> card.chooseBottom(top.getText())), 2, 4);
+        row(rows, "card.buffer", "card-buffer", buffer, this::takeBuffer);
+        buffer.setPromptText(Words.of("card.buffer.prompt"));
+        buffer.setTooltip(new Tooltip(Words.of("card.buffer.tip")));
         Label title = new Label(Words.of("card.title"));
         title.getStyleClass().add("sl-strong");
         HBox buttons = new HBox(
@@ -61,6 +68,22 @@ final class PrismCard extends VBox {
         show();
     }
 
+    private static Button chooser(String id, Runnable does) {
+        Button button = new Button("…");
+        button.setId(id);
+        button.getStyleClass().add("small");
+        button.setAccessibleText(Words.of("card.lid.file"));
+        button.setTooltip(new Tooltip(Words.of("card.lid.file")));
+        button.setOnAction(pressed -> does.run());
+        return button;
+    }
+
+    private void takeBuffer(String distance) {
+        if (card.buffer(distance)) {
+            buffer.clear();
+        }
+    }
+
     /** A value is taken by Enter, and when the keyboard leaves the field. */
     private void row(GridPane rows, String key, String id, TextField field, Consumer<String> take) {
         Label label = new Label(Words.of(key));
@@ -70,7 +93,7 @@ final class PrismCard extends VBox {
         field.setPrefColumnCount(14);
         field.setOnAction(entered -> take.accept(field.getText()));
         field.focusedProperty().addListener((focus, before, now) -> {
-            if (!now && field != boundary && !field.getText().equals(field.getUserData())) {
+            if (!now && field != boundary && field != buffer && !field.getText().equals(field.getUserData())) {
                 take.accept(field.getText());
             }
         });

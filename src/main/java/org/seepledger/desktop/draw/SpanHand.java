@@ -45,14 +45,11 @@ final class SpanHand {
 
     private Optional<Place> well(Touch touch) {
         Place pointer = new Place(touch.x(), touch.y());
-        return model.session()
-                .set()
-                .get()
-                .flatMap(set -> set.workbench().wells(model.session().interval().get()).stream()
-                        .map(SpanHand::place)
-                        .filter(place -> place.distance(pointer)
-                                <= Nearness.ofPixel(touch.pixel()).capture())
-                        .min(Comparator.comparingDouble(place -> place.distance(pointer))));
+        return model.session().wells().get().stream()
+                .map(SpanHand::place)
+                .filter(place -> place.distance(pointer)
+                        <= Nearness.ofPixel(touch.pixel()).capture())
+                .min(Comparator.comparingDouble(place -> place.distance(pointer)));
     }
 
     private static Place place(WellPlace well) {

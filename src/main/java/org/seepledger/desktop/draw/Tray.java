@@ -22,11 +22,12 @@ public final class Tray extends HBox {
      *
      * @param model the drawing
      * @param hand works with the tools
+     * @param surfaces are chosen as lids
      */
-    public Tray(DraftModel model, DraftHand hand) {
+    public Tray(DraftModel model, DraftHand hand, LidSurfaces surfaces) {
         this.model = model;
         this.hand = hand;
-        this.card = new PrismCard(model, hand);
+        this.card = new PrismCard(model, hand, surfaces);
         setId("tray");
         setSpacing(8);
         setAlignment(Pos.TOP_RIGHT);

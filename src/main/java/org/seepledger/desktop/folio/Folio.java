@@ -22,6 +22,8 @@ import org.seepledger.desktop.exchange.ExchangeModel;
 import org.seepledger.desktop.exchange.ExchangeView;
 import org.seepledger.desktop.ledger.LedgerModel;
 import org.seepledger.desktop.ledger.LedgerView;
+import org.seepledger.desktop.origin.OriginModel;
+import org.seepledger.desktop.origin.OriginView;
 import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.session.Session;
@@ -43,6 +45,8 @@ import org.seepledger.desktop.words.Words;
 /** All panes of the budget, on one live budget and one reading of figures. */
 public final class Folio {
 
+    private static final int ORIGIN = 3;
+
     private final BorderPane pages = new BorderPane();
     private final ToggleGroup chosen = new ToggleGroup();
     private final HBox marks = new HBox();
@@ -60,11 +64,11 @@ public final class Folio {
      *
      * @param session what the window looks at
      * @param tasks where work is done
-     * @param copies where copies go
      * @param dialogs asks for files
+     * @param copies where copies go
      * @param theme light or dark
      */
-    public Folio(Session session, Tasks tasks, CopyBoard copies, FileDialogs dialogs, ObservableValue<Theme> theme) {
+    public Folio(Session session, Tasks tasks, FileDialogs dialogs, CopyBoard copies, ObservableValue<Theme> theme) {
         this.session = session;
         Reading reading = new Reading(session);
         this.live = new LiveBudget(session, tasks);
@@ -85,9 +89,12 @@ public final class Folio {
         add(
                 "folio.answers",
                 ofSubject(
-                        new ClosureView(new ClosureModel(session, live, reading), theme),
+                        new ClosureView(new ClosureModel(session, live, reading, tasks), theme),
                         new SoluteAnswersView(answers)));
         add("folio.exchange", new ExchangeView(new ExchangeModel(session, live, reading, copies), theme));
+        // Before the model, which takes the question away.
+        session.asked().addListener((asked, before, after) -> after.ifPresent(row -> open(ORIGIN)));
+        add("folio.origin", new OriginView(new OriginModel(session, reading, tasks, dialogs, copies)));
         this.transectsMark = add("folio.transects", new TransectView(transects));
         ofSolutes(transectsMark, transects.open());
         marks.getChildren().add(new SubjectBox(session));
@@ -179,6 +186,8 @@ public final class Folio {
                 new Action(group, "action.panels", "Shortcut+Shift+P", this::hasSolutes, this::openPanels),
                 new Action(
                         group, "action.subject", "Shortcut+Shift+U", this::hasSolutes, () -> SubjectBox.next(session)),
+                new Action(group, "action.page.origin", "Shortcut+4", () -> open(ORIGIN)),
+                new Action(group, "action.ledger.origin", "Shortcut+T", ledger::askOrigin),
                 new Action(group, "action.ledger.copy", "Shortcut+Shift+C", ledger::copy),
                 new Action(
                         group,

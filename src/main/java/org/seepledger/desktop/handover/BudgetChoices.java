@@ -2,7 +2,6 @@ package org.seepledger.desktop.handover;
 
 import java.nio.file.Path;
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 import javafx.beans.property.BooleanProperty;
 import javafx.beans.property.IntegerProperty;
@@ -86,7 +85,7 @@ public final class BudgetChoices {
         if (periods.value().isPresent()) {
             command.with("--periods", periods.value());
         } else if (every.get() != Periods.Every.INTERVAL) {
-            command.with("--every", word(every.get()));
+            command.with("--every", CommandText.word(every.get()));
         }
         Optional<Integer> month = Optional.of(waterYearStart.get()).filter(start -> start != OCTOBER);
         return command.with("--water-year-start", month)
@@ -95,12 +94,8 @@ public final class BudgetChoices {
                         "--wells",
                         Optional.of(wells.get())
                                 .filter(rule -> rule != WellRule.POINT)
-                                .map(BudgetChoices::word))
+                                .map(CommandText::word))
                 .flag("--clip", clip.get())
                 .with("--max-closure-error", limit.value());
-    }
-
-    static String word(Enum<?> choice) {
-        return choice.name().toLowerCase(Locale.ROOT).replace('_', '-');
     }
 }

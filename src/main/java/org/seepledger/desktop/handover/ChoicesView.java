@@ -14,6 +14,7 @@ import javafx.scene.control.TextField;
 import javafx.scene.layout.VBox;
 import org.seepledger.balance.Periods;
 import org.seepledger.balance.WellRule;
+import org.seepledger.desktop.command.CommandText;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.report.page.Amounts;
 
@@ -117,7 +118,7 @@ final class ChoicesView extends VBox {
     }
 
     private static String words(Enum<?> choice) {
-        return Words.of("handover.choice." + BudgetChoices.word(choice));
+        return Words.of("handover.choice." + CommandText.word(choice));
     }
 
     private static String month(int month) {

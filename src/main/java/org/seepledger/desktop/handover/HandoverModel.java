@@ -32,6 +32,7 @@ import org.seepledger.job.HandoverRequest;
 import org.seepledger.job.PlumeOutcome;
 import org.seepledger.job.PngPainter;
 import org.seepledger.job.ShownPicture;
+import org.seepledger.progress.Cancelled;
 import org.seepledger.progress.Progress;
 import org.seepledger.unit.Figures;
 
@@ -85,8 +86,8 @@ public final class HandoverModel {
         this.copies = copies;
         this.opener = opener;
         this.painter = painter;
-        this.working = tasks.latest("handing over");
-        this.looking = tasks.latest("looking at the folder to hand over");
+        this.working = tasks.latest("task.handover");
+        this.looking = tasks.latest("task.handover.looking");
         this.choices = new HandoverChoices(session.pictures());
         session.set().addListener((set, before, after) -> begin());
         List<ObservableValue<?>> all = new ArrayList<>(List.of(session.shapes()));
@@ -276,7 +277,7 @@ public final class HandoverModel {
     /** Copies the commands. */
     public void copyCommands() {
         copies.text(commands.get());
-        session.status().set(Words.of("handover.copied"));
+        session.notices().done(Words.of("handover.copied"));
     }
 
     /** Hands over. */
@@ -303,10 +304,19 @@ public final class HandoverModel {
     private void handedOver(HandoverOutcome done) {
         outcome.set(Optional.of(done));
         stage.set(Stage.DONE);
-        session.status().set(Words.of("handover.done", done.files().size(), done.out()));
+        session.notices().done(Words.of("handover.done", done.files().size(), done.out()));
+    }
+
+    private void stopped() {
+        stage.set(Stage.CHOOSING);
+        session.notices().done(Words.of("handover.cancelled"));
     }
 
     private void failed(Throwable thrown) {
+        if (thrown instanceof Cancelled) {
+            stopped();
+            return;
+        }
         stage.set(Stage.CHOOSING);
         fault.set(FaultWords.of(thrown));
     }
@@ -314,8 +324,7 @@ public final class HandoverModel {
     /** Stops the work; nothing is left behind. */
     public void cancel() {
         working.cancel();
-        stage.set(Stage.CHOOSING);
-        session.status().set(Words.of("handover.cancelled"));
+        stopped();
     }
 
     /** Goes back to what is chosen. */

@@ -109,6 +109,6 @@ public final class ReportChoices {
                 "--report-amounts",
                 Optional.of(amounts.get())
                         .filter(wanted -> wanted != Amounts.RATE)
-                        .map(BudgetChoices::word));
+                        .map(CommandText::word));
     }
 }

@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.function.Function;
 import java.util.stream.IntStream;
+import javafx.beans.binding.Bindings;
 import javafx.beans.property.Property;
 import javafx.beans.value.ObservableValue;
 import javafx.scene.control.Button;
@@ -46,7 +47,8 @@ final class LedgerChoices extends VBox {
                 amounts(model),
                 units,
                 box("ledger-arrangement", List.of(Arrangement.values()), LedgerChoices::arranged, model.arrangement()),
-                copy(model));
+                copy(model),
+                origin(model));
         getChildren().addAll(belongs, closure, notes, choices);
         units.setId("ledger-unit");
         units.setMinWidth(96);
@@ -72,6 +74,16 @@ final class LedgerChoices extends VBox {
         copy.setTooltip(new Tooltip(Words.of("ledger.copy.tip")));
         copy.setOnAction(pressed -> model.copy());
         return copy;
+    }
+
+    private static Button origin(LedgerModel model) {
+        Button origin = new Button(Words.of("ledger.origin.button"));
+        origin.setId("ledger-origin");
+        origin.setTooltip(new Tooltip(Words.of("ledger.origin")));
+        origin.disableProperty()
+                .bind(Bindings.createBooleanBinding(() -> model.chosen().get().isEmpty(), model.chosen()));
+        origin.setOnAction(pressed -> model.askOrigin());
+        return origin;
     }
 
     private ChoiceBox<Every> periods() {

@@ -16,6 +16,7 @@ import org.seepledger.desktop.budget.LiveBudget;
 import org.seepledger.desktop.budget.Reading;
 import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.session.OpenSet;
+import org.seepledger.desktop.session.RowAsked;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.solute.LivePlume;
 import org.seepledger.desktop.solute.MassReading;
@@ -37,6 +38,7 @@ public final class LedgerModel {
     private final ReadOnlyObjectWrapper<PaneState> state = new ReadOnlyObjectWrapper<>(PaneState.READY);
     private final ObjectProperty<Arrangement> arrangement = new SimpleObjectProperty<>(Arrangement.ITEMS);
     private final ObjectProperty<Order> order = new SimpleObjectProperty<>(Order.AS_DRAWN);
+    private final ObjectProperty<Optional<LedgerRow>> chosen = new SimpleObjectProperty<>(Optional.empty());
     private double largest;
     private String whose = "";
 
@@ -137,6 +139,24 @@ public final class LedgerModel {
      */
     public void light(LedgerRow row) {
         session.lit().set(row.isFace() ? row.item() : "");
+    }
+
+    /** {@return the row that is chosen, if one is that has a number} */
+    public ObjectProperty<Optional<LedgerRow>> chosen() {
+        return chosen;
+    }
+
+    /** Asks where the number of the chosen row comes from. */
+    public void askOrigin() {
+        if (sheets.ofSolute()) {
+            session.notices().refuse(Words.of("ledger.origin.water"));
+            return;
+        }
+        chosen.get()
+                .filter(row -> row.kind() != LedgerRow.Kind.HEADING)
+                .ifPresentOrElse(
+                        row -> session.asked().set(Optional.of(new RowAsked(row.group(), row.item(), row.layer()))),
+                        () -> session.notices().refuse(Words.of("ledger.origin.none")));
     }
 
     /** {@return the first row about the face that is lit up, if there is one} */

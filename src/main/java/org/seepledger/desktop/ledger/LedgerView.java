@@ -1,9 +1,12 @@
 package org.seepledger.desktop.ledger;
 
+import java.util.Optional;
 import javafx.collections.ListChangeListener;
 import javafx.css.PseudoClass;
 import javafx.scene.control.Button;
+import javafx.scene.control.ContextMenu;
 import javafx.scene.control.Label;
+import javafx.scene.control.MenuItem;
 import javafx.scene.control.TableColumn;
 import javafx.scene.control.TableRow;
 import javafx.scene.control.TableView;
@@ -38,12 +41,14 @@ public final class LedgerView extends BorderPane {
         getStyleClass().add("sl-ledger");
         setTop(new LedgerChoices(model));
         buildTable();
-        setCenter(new StatePane(table, model.state()).withAction(Words.of("budget.draw"), model::draw));
+        BorderPane sheet = new BorderPane(table);
+        sheet.setBottom(new LedgerFoot(model));
+        setCenter(new StatePane(sheet, model.state()).withAction(Words.of("budget.draw"), model::draw));
     }
 
     private void buildTable() {
         table.setId("ledger-table");
-        table.setItems(model.rows());
+        table.setItems(model.rows().filtered(row -> !LedgerFoot.isTotal(row)));
         fit(model.solute().get());
         model.solute().addListener((solute, before, after) -> fit(after));
         table.setPlaceholder(new Label());
@@ -56,12 +61,17 @@ public final class LedgerView extends BorderPane {
         table.getColumns().add(scaleColumn());
         table.setRowFactory(made -> new KindRow());
         table.getSelectionModel().selectedItemProperty().addListener((row, before, after) -> {
+            model.chosen().set(Optional.ofNullable(after));
             if (!following && after != null) {
                 model.light(after);
             }
         });
         model.litItem().addListener((item, before, after) -> follow());
         model.rows().addListener((ListChangeListener<LedgerRow>) change -> follow());
+        MenuItem origin = new MenuItem(Words.of("ledger.origin"));
+        origin.setId("ledger-origin-menu");
+        origin.setOnAction(pressed -> model.askOrigin());
+        table.setContextMenu(new ContextMenu(origin));
         table.setOnKeyPressed(key -> {
             if (COPY.match(key)) {
                 model.copy();
@@ -104,8 +114,8 @@ public final class LedgerView extends BorderPane {
         TableColumn<LedgerRow, LedgerRow> column = new TableColumn<>();
         column.setGraphic(header(words, order));
         column.getStyleClass().add("sl-numbers");
-        column.setMinWidth(102);
-        column.setPrefWidth(102);
+        column.setMinWidth(84);
+        column.setPrefWidth(92);
         return shown(column, new NumberCell.Factory(value));
     }
 
@@ -125,8 +135,8 @@ public final class LedgerView extends BorderPane {
 
     private TableColumn<LedgerRow, LedgerRow> scaleColumn() {
         TableColumn<LedgerRow, LedgerRow> column = new TableColumn<>();
-        column.setMinWidth(60);
-        column.setPrefWidth(90);
+        column.setMinWidth(48);
+        column.setPrefWidth(56);
         return shown(column, new ScaleCell.Factory(model));
     }
 

@@ -56,6 +56,9 @@ final class ContourModel {
     }
 
     private static List<Contour> draw(Pyramid pyramid, RoundValues levels, Progress progress) {
+        if (pyramid.isFlat()) {
+            return List.of();
+        }
         Grid grid = pyramid.lattice().grid();
         Drape drape = Drape.of(grid, grid.window(), MOST_CELLS, pyramid::cells);
         List<Contour> drawn = new ArrayList<>();

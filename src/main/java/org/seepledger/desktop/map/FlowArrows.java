@@ -16,12 +16,15 @@ import org.seepledger.prism.Ring;
 import org.seepledger.prism.Side;
 import org.seepledger.unit.Figures;
 
-/** The net flow through each face as an arrow across its longest side, its width in proportion. */
+/**
+ * The net flow through each face as an arrow across its longest side, its width in proportion. Gain and loss have their colours
+ * within a dark rim and a light one, since alone they would not stand out from every colour of the map.
+ */
 final class FlowArrows {
 
     private static final double HALF = 20;
     private static final double WIDEST = 14;
-    private static final double CORE = 12;
+    private static final double CORE = 9;
     private static final double LEAST_SHARE = 0.01;
     private static final double SIZE = 11.5;
 
@@ -90,23 +93,32 @@ final class FlowArrows {
                 face.x() + face.outX() * reach,
                 face.y() + face.outY() * reach,
                 width);
-        marks.add(arrow.mark(fill(net), Mark.Stroke.of(Ink.Token.PAPER, 1.4)));
-        labels.keepFree(new Box(face.x() - CORE, face.y() - CORE, 2 * CORE, 2 * CORE));
+        marks.add(arrow.mark(fill(net), Mark.Stroke.of(Ink.Token.PAPER, 3.6)));
+        marks.add(arrow.mark(fill(net), Mark.Stroke.of(Ink.Token.TEXT, 1)));
+        for (double along : new double[] {-CORE, 0, CORE}) {
+            double x = face.x() + along * face.outX();
+            double y = face.y() + along * face.outY();
+            labels.keepFree(new Box(x - CORE / 2, y - CORE / 2, CORE, CORE));
+        }
     }
 
     private static Mark.Fill fill(double net) {
         return Mark.Fill.of(net > 0 ? Ink.Token.GAIN : Ink.Token.LOSS);
     }
 
+    /** The flow stands beyond the arrow's outer end, else beyond its inner one. */
     private void label(Face face, Labels labels) {
+        labels.place(List.of(text(face, 1), text(face, -1)), marks);
+    }
+
+    private Mark.Text text(Face face, int side) {
         double net = flows.net().get(face.item());
         String words = (net > 0 ? "+" : "−") + Figures.typeset(Math.abs(net));
-        double x = face.x() + face.outX() * (HALF + 6);
-        double y = face.y() + face.outY() * (HALF + 6) + 0.35 * SIZE;
-        Mark.Anchor anchor =
-                face.outX() > 0.3 ? Mark.Anchor.START : face.outX() < -0.3 ? Mark.Anchor.END : Mark.Anchor.MIDDLE;
-        Ink ink = net > 0 ? Ink.Token.GAIN : Ink.Token.LOSS;
-        Mark.Text text = new Mark.Text(x, y, words, SIZE, anchor, ink, true, true, 0);
-        labels.place(List.of(text), marks);
+        double towardX = side * face.outX();
+        double towardY = side * face.outY();
+        double x = face.x() + towardX * (HALF + 6);
+        double y = face.y() + towardY * (HALF + 8) + 0.35 * SIZE;
+        Mark.Anchor anchor = towardX > 0.3 ? Mark.Anchor.START : towardX < -0.3 ? Mark.Anchor.END : Mark.Anchor.MIDDLE;
+        return new Mark.Text(x, y, words, SIZE, anchor, Ink.Token.TEXT, true, true, 0);
     }
 }

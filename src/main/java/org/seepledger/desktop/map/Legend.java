@@ -24,34 +24,42 @@ import org.seepledger.picture.Mark;
 import org.seepledger.picture.RoundValues;
 import org.seepledger.picture.ValueScale;
 
-/** Which colour stands for which value; the ends of the range are typed, or fitted to what is shown. */
+/** Which colour stands for which value; a click opens fields to type the ends of the range, or to fit them to what is shown. */
 final class Legend extends VBox {
 
-    private static final double WIDTH = 236;
-    private static final double BAR = 12;
-    private static final double SIDE = 18;
+    private static final double WIDTH = 196;
+    private static final double BAR = 10;
+    private static final double SIDE = 14;
 
     private final ValuesModel model;
     private final ObservableValue<Theme> theme;
-    private final Label title = new Label();
-    private final Canvas bar = new Canvas(WIDTH, BAR + 20);
+    private final Button title = new Button();
+    private final Canvas bar = new Canvas(WIDTH, BAR + 16);
     private final TextField from = field("range-from");
     private final TextField to = field("range-to");
+    private final HBox ends = new HBox(5);
 
     Legend(ValuesModel model, ObservableValue<Theme> theme) {
         this.model = model;
         this.theme = theme;
         setId("legend");
-        getStyleClass().add("sl-float");
-        title.getStyleClass().add("sl-strong");
+        getStyleClass().addAll("sl-float", "sl-legend");
+        title.setId("legend-title");
+        title.getStyleClass().setAll("sl-legend-title");
+        title.setTooltip(new Tooltip(Words.of("action.legend")));
+        title.setOnAction(pressed -> turn());
+        title.setMaxWidth(WIDTH);
+        bar.setOnMouseClicked(click -> turn());
         Region gap = new Region();
         HBox.setHgrow(gap, Priority.ALWAYS);
         Button fit = new Button(Words.of("map.range.fit"));
         fit.setId("range-fit");
         fit.getStyleClass().addAll("small", "flat");
         fit.setOnAction(pressed -> model.fitRange());
-        HBox ends = new HBox(6, from, new Label(Words.of("map.range.to")), to, gap, logarithmic(), fit);
+        ends.getChildren().addAll(from, new Label(Words.of("map.range.to")), to, gap, logarithmic(), fit);
         ends.setAlignment(Pos.CENTER_LEFT);
+        ends.setVisible(false);
+        ends.managedProperty().bind(ends.visibleProperty());
         getChildren().addAll(title, bar, new NonDetectKey(model, theme), ends);
         setMaxSize(USE_PREF_SIZE, USE_PREF_SIZE);
         for (TextField field : List.of(from, to)) {
@@ -86,10 +94,15 @@ final class Legend extends VBox {
         return log;
     }
 
+    /** Opens the fields for another range, or folds them away. */
+    void turn() {
+        ends.setVisible(!ends.isVisible());
+    }
+
     private static TextField field(String id) {
         TextField field = new TextField();
         field.setId(id);
-        field.setPrefColumnCount(6);
+        field.setPrefColumnCount(5);
         field.getStyleClass().add("small");
         return field;
     }
@@ -155,7 +168,7 @@ final class Legend extends VBox {
             double[] tick = {x, BAR, x, BAR + 4};
             painter.paint(List.of(
                     new Mark.Line(tick, Mark.Stroke.of(Ink.Token.MUTED, 1)),
-                    Mark.Text.of(x, BAR + 16, ticks.label(i), 11, Mark.Anchor.MIDDLE)
+                    Mark.Text.of(x, BAR + 15, ticks.label(i), 11, Mark.Anchor.MIDDLE)
                             .in(Ink.Token.MUTED)));
         }
     }

@@ -11,6 +11,7 @@ import org.seepledger.picture.Ink;
 import org.seepledger.picture.Labels;
 import org.seepledger.picture.Mark;
 import org.seepledger.prism.Prism;
+import org.seepledger.prism.Ring;
 import org.seepledger.prism.Side;
 
 /**
@@ -23,10 +24,23 @@ final class Lettering {
     private static final double WELL = 4.2;
     private static final double SIZE = 11.5;
     private static final double EVERY = 420;
+    private static final double FIRST = EVERY / 4;
+
+    /** How far letters keep from each other: their halos must not meet. */
+    private static final double APART = 3.5;
+
+    /** Longer names of wells are cut; the read-out has them whole. */
+    private static final double LONGEST_NAME = 120;
+
+    /** How far places along a line are apart that are tried for letters, or kept free of them. */
+    private static final double TRIED = 12;
+
+    private static final double OUTLINE = 3;
+    private static final double VERTEX = 3;
 
     private final MapModel model;
     private final Camera camera;
-    private final Labels labels = new Labels(new Box(-FAR, -FAR, 2 * FAR, 2 * FAR));
+    private final Labels labels = new Labels(new Box(-FAR, -FAR, 2 * FAR, 2 * FAR), APART);
     private final List<Mark> marks = new ArrayList<>();
 
     private Lettering(MapModel model) {
@@ -45,11 +59,13 @@ final class Lettering {
                 lettering.name(prism, false);
             }
         }
+        session.selectedPrism().ifPresent(lettering::keepVerticesFree);
         if (model.overlays().wells().get()) {
             List<WellPlace> near = lettering.nearWells();
             near.forEach(lettering::keepFree);
             near.forEach(lettering::well);
         }
+        session.drawing().get().prisms().forEach(lettering::keepFree);
         model.contours().lines().get().forEach(lettering::contour);
         return lettering.marks;
     }
@@ -60,7 +76,7 @@ final class Lettering {
         }
     }
 
-    /** A prism is named above its northernmost vertex. */
+    /** A prism is named above its northernmost vertex, else in its middle. */
     private void name(Prism prism, boolean selected) {
         Side top = prism.rings().get(0).sides().get(0);
         for (Side side : prism.rings().get(0).sides()) {
@@ -68,11 +84,16 @@ final class Lettering {
         }
         double x = camera.x(top.x());
         double y = camera.y(top.y());
+        Extent extent = Extent.of(prism);
+        double middleX = camera.x(extent.middleX());
+        double middleY = camera.y(extent.middleY());
         List<Mark.Text> choices = List.of(
-                text(x, y - 9, prism.name(), Mark.Anchor.MIDDLE, selected),
+                text(x, y - 10, prism.name(), Mark.Anchor.MIDDLE, selected),
                 text(x + 9, y - 4, prism.name(), Mark.Anchor.START, selected),
                 text(x - 9, y - 4, prism.name(), Mark.Anchor.END, selected),
-                text(x, y + 20, prism.name(), Mark.Anchor.MIDDLE, selected));
+                text(x, y + 20, prism.name(), Mark.Anchor.MIDDLE, selected),
+                text(middleX, middleY, prism.name(), Mark.Anchor.MIDDLE, selected),
+                text(middleX, middleY + 34, prism.name(), Mark.Anchor.MIDDLE, selected));
         labels.place(choices, marks);
     }
 
@@ -81,7 +102,7 @@ final class Lettering {
     }
 
     private List<WellPlace> nearWells() {
-        return model.wells().get().stream()
+        return model.session().wells().get().stream()
                 .filter(well -> OnScreen.isNear(camera.x(well.x()), camera.y(well.y()), camera))
                 .toList();
     }
@@ -90,16 +111,51 @@ final class Lettering {
         labels.keepFree(new Box(camera.x(well.x()) - WELL, camera.y(well.y()) - WELL, 2 * WELL, 2 * WELL));
     }
 
+    private void keepVerticesFree(Prism prism) {
+        for (Ring ring : prism.rings()) {
+            for (Side side : ring.sides()) {
+                labels.keepFree(
+                        new Box(camera.x(side.x()) - VERTEX, camera.y(side.y()) - VERTEX, 2 * VERTEX, 2 * VERTEX));
+            }
+        }
+    }
+
+    /** The values of contours keep off outlines. */
+    private void keepFree(Prism prism) {
+        for (Ring ring : prism.rings()) {
+            for (int i = 0; i < ring.sides().size(); i++) {
+                keepFree(ring.sides().get(i), ring.after(i));
+            }
+        }
+    }
+
+    private void keepFree(Side from, Side to) {
+        double x = camera.x(from.x());
+        double y = camera.y(from.y());
+        double across = camera.x(to.x()) - x;
+        double down = camera.y(to.y()) - y;
+        double length = Math.hypot(across, down);
+        for (double along = 0; along < length; along += TRIED) {
+            double placeX = x + across * along / length;
+            double placeY = y + down * along / length;
+            if (OnScreen.isNear(placeX, placeY, camera)) {
+                labels.keepFree(new Box(placeX - OUTLINE, placeY - OUTLINE, 2 * OUTLINE, 2 * OUTLINE));
+            }
+        }
+    }
+
     /** A ring; full where the well takes water in the interval, with a point where it adds. */
     private void well(WellPlace well) {
         double x = camera.x(well.x());
         double y = camera.y(well.y());
-        Ink ink = well.rate() < 0 ? Ink.Token.LOSS : well.rate() > 0 ? Ink.Token.GAIN : Ink.Token.MUTED;
-        marks.add(round(x, y, WELL, Ink.Token.PAPER, Optional.of(Mark.Stroke.of(ink, 2))));
+        marks.add(round(x, y, WELL, Ink.Token.PAPER, Optional.of(Mark.Stroke.of(Ink.Token.PAPER, 4.4))));
+        marks.add(round(x, y, WELL, Ink.Token.PAPER, Optional.of(Mark.Stroke.of(Ink.Token.TEXT, 1.8))));
         if (well.rate() != 0) {
-            marks.add(round(x, y, well.rate() < 0 ? 2.2 : 1.2, ink, Optional.empty()));
+            Ink ink = well.rate() < 0 ? Ink.Token.LOSS : Ink.Token.GAIN;
+            marks.add(round(x, y, well.rate() < 0 ? 2.4 : 1.4, ink, Optional.empty()));
         }
-        List<Mark.Text> choices = Labels.around(x, y, WELL + 3, well.name(), SIZE).stream()
+        String name = org.seepledger.picture.Lettering.fitted(well.name(), SIZE, LONGEST_NAME);
+        List<Mark.Text> choices = Labels.around(x, y, WELL + APART + 1, name, SIZE).stream()
                 .map(Mark.Text::haloed)
                 .toList();
         labels.place(choices, marks);
@@ -114,16 +170,22 @@ final class Lettering {
         return new Mark.Area(List.of(ring), Optional.of(Mark.Fill.of(ink)), rim);
     }
 
-    /** The value stands along each line again and again, measured from the line's begin. */
+    /**
+     * The value stands along each line again and again, measured from the line's begin, in stretches that do not depend on
+     * what is seen: each has its value at the first place that is free.
+     */
     private void contour(ContourModel.Contour contour) {
         for (double[] line : contour.lines()) {
-            double next = EVERY / 4;
             double walked = 0;
+            double tried = 0;
+            int labelled = 0;
             for (int i = 2; i < line.length; i += 2) {
                 walked += Math.hypot(line[i] - line[i - 2], line[i + 1] - line[i - 1]) * camera.scale();
-                boolean near = walked >= next && OnScreen.isNear(camera.x(line[i]), camera.y(line[i + 1]), camera);
-                if (near && label(contour, line, i)) {
-                    next = walked + EVERY;
+                int stretch = (int) Math.floor((walked - FIRST) / EVERY) + 1;
+                boolean near = OnScreen.isNear(camera.x(line[i]), camera.y(line[i + 1]), camera);
+                if (stretch > labelled && near && walked - tried >= TRIED) {
+                    tried = walked;
+                    labelled = label(contour, line, i) ? stretch : labelled;
                 }
             }
         }

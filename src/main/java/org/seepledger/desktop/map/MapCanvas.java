@@ -65,8 +65,9 @@ final class MapCanvas extends Region {
             session.drawing(),
             session.selected(),
             session.lit(),
+            session.marked(),
             session.faceFlows(),
-            model.wells(),
+            session.wells(),
             model.overlays().wells()
         };
         for (Observable cause : causes) {
@@ -171,11 +172,12 @@ final class MapCanvas extends Region {
             return;
         }
         Camera camera = model.camera().get();
+        Aquifer aquifer = model.session().set().get().orElseThrow().aquifer();
         MarkPainter painter = new MarkPainter(canvas, theme.getValue());
         painter.paint(Outlines.of(model.session(), camera));
+        painter.paint(MarkedCells.of(model.session().marked().get(), aquifer.grid(), camera));
         painter.paint(Lettering.of(model));
         guests.forEach(guest -> painter.paint(guest.marks(camera)));
-        Aquifer aquifer = model.session().set().get().orElseThrow().aquifer();
         double scale = camera.scale() / aquifer.grid().planUnit();
         painter.paint(ScaleBar.within(scale, aquifer.lengthUnit().toString(), LONGEST_BAR)
                 .marks(CORNER, camera.height() - CORNER - ScaleBar.HEIGHT));

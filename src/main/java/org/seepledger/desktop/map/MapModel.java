@@ -9,14 +9,16 @@ import javafx.beans.property.SimpleObjectProperty;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
+import org.seepledger.desktop.task.EntryGuard;
+import org.seepledger.desktop.task.Lane;
 import org.seepledger.desktop.task.Tasks;
-import org.seepledger.job.WellPlace;
+import org.seepledger.desktop.words.FaultWords;
 import org.seepledger.report.CellPlace;
 
 /** What the map shows: which part of it, which values, and where the cursor is. */
 public final class MapModel {
 
-    private static final double MARGIN = 48;
+    private static final double MARGIN = 36;
 
     /** How many pixels a cell has at least after the map went to it. */
     private static final double CELL_SEEN = 24;
@@ -29,7 +31,7 @@ public final class MapModel {
     private final Overlays overlays = new Overlays();
     private final ObjectProperty<Camera> camera = new SimpleObjectProperty<>(new Camera(0, 0, 0, 0, 1));
     private final ReadOnlyObjectWrapper<Optional<Readout>> readout = new ReadOnlyObjectWrapper<>(Optional.empty());
-    private final ReadOnlyObjectWrapper<List<WellPlace>> wells = new ReadOnlyObjectWrapper<>(List.of());
+    private final Lane lookingForWells;
     private final ValuesModel values;
     private final FluxModel flux;
     private final ContourModel contours;
@@ -46,6 +48,7 @@ public final class MapModel {
         this.values = new ValuesModel(session, tasks);
         this.contours = new ContourModel(values, overlays, tasks);
         this.flux = new FluxModel(session, this, tasks);
+        this.lookingForWells = tasks.latest("task.wells");
         session.set().addListener((set, before, after) -> {
             framed = false;
             frame();
@@ -68,8 +71,18 @@ public final class MapModel {
 
     private void findWells() {
         int interval = session.interval().get();
-        wells.set(
-                session.set().get().map(set -> set.workbench().wells(interval)).orElse(List.of()));
+        lookingForWells.cancel();
+        session.set()
+                .get()
+                .ifPresentOrElse(
+                        set -> lookingForWells.run(
+                                progress -> {
+                                    EntryGuard.enter();
+                                    return set.workbench().wells(interval);
+                                },
+                                session.wells()::set,
+                                fault -> session.status().set(FaultWords.of(fault))),
+                        () -> session.wells().set(List.of()));
     }
 
     /**
@@ -196,10 +209,6 @@ public final class MapModel {
 
     ContourModel contours() {
         return contours;
-    }
-
-    ReadOnlyObjectProperty<List<WellPlace>> wells() {
-        return wells.getReadOnlyProperty();
     }
 
     /** {@return where the cursor is, if it is on the map} */

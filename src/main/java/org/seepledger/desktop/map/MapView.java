@@ -30,6 +30,7 @@ public final class MapView extends BorderPane {
     private final GroundModel ground;
     private final MapCanvas canvas;
     private final Hand hand;
+    private final Legend legend;
     private boolean panning;
     private double lastX;
     private double lastY;
@@ -53,7 +54,7 @@ public final class MapView extends BorderPane {
         setId("map");
         canvas.setId("map-canvas");
         canvas.setFocusTraversable(true);
-        Legend legend = new Legend(model.values(), theme);
+        this.legend = new Legend(model.values(), theme);
         LayerColumn layers = new LayerColumn(model.session());
         Region ring = new Region();
         ring.getStyleClass().add("sl-ring");
@@ -197,6 +198,7 @@ public final class MapView extends BorderPane {
                 new Action(
                         group, "action.wells", "F4", () -> flip(model.overlays().wells())),
                 new Action(group, "action.fit", "F5", model.values()::fitRange),
+                new Action(group, "action.legend", "L", legend::turn),
                 new Action(group, "action.ground", "Shortcut+B", ground::choose),
                 new Action(group, "action.ground.clear", "Shortcut+Shift+B", ground::clear));
     }

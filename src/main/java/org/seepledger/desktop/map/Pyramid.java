@@ -15,6 +15,9 @@ final class Pyramid {
     /** Texels along a tile's side. */
     static final int TILE = 256;
 
+    /** A few times the rounding of a value that is kept in single precision. */
+    private static final float ROUNDING = 5e-7f;
+
     private final Lattice lattice;
     private final List<Level> levels;
 
@@ -115,6 +118,19 @@ final class Pyramid {
             values[column] = levels.get(0).at(texelRow, texel);
         }
         return values;
+    }
+
+    /** Whether all values are one but for rounding, so that lines between them would mean nothing. */
+    boolean isFlat() {
+        float least = Float.POSITIVE_INFINITY;
+        float greatest = Float.NEGATIVE_INFINITY;
+        for (float value : levels.get(0).values()) {
+            if (Float.isFinite(value)) {
+                least = Math.min(least, value);
+                greatest = Math.max(greatest, value);
+            }
+        }
+        return greatest - least <= ROUNDING * Math.max(Math.abs(least), Math.abs(greatest));
     }
 
     Lattice lattice() {

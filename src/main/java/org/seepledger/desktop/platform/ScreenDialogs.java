@@ -2,6 +2,7 @@ package org.seepledger.desktop.platform;
 
 import java.io.File;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Optional;
 import javafx.stage.DirectoryChooser;
 import javafx.stage.FileChooser;
@@ -34,6 +35,17 @@ public final class ScreenDialogs implements FileDialogs {
     @Override
     public Optional<Path> fileToRead(String title, Kind kind) {
         return kept(chooser(title, kind).showOpenDialog(owner));
+    }
+
+    @Override
+    public List<Path> filesToRead(String title) {
+        FileChooser chooser = new FileChooser();
+        chooser.setTitle(title);
+        last.ifPresent(chooser::setInitialDirectory);
+        List<File> chosen = chooser.showOpenMultipleDialog(owner);
+        return chosen == null
+                ? List.of()
+                : chosen.stream().map(this::kept).flatMap(Optional::stream).toList();
     }
 
     @Override

@@ -1,6 +1,7 @@
 package org.seepledger.desktop.port;
 
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Optional;
 
 /** Asks which file or folder. An empty answer means that the person thought better of it. */
@@ -20,6 +21,13 @@ public interface FileDialogs {
      * @param kind what kind of file
      */
     Optional<Path> fileToRead(String title, Kind kind);
+
+    /**
+     * {@return files that exist; none if the person thought better of it}
+     *
+     * @param title what they are for
+     */
+    List<Path> filesToRead(String title);
 
     /**
      * {@return a file to be written; whether it may be overwritten has been asked}

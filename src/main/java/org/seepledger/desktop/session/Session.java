@@ -1,5 +1,6 @@
 package org.seepledger.desktop.session;
 
+import java.util.List;
 import java.util.Optional;
 import java.util.TreeMap;
 import javafx.beans.property.IntegerProperty;
@@ -14,6 +15,8 @@ import javafx.collections.FXCollections;
 import javafx.collections.ObservableMap;
 import org.seepledger.desktop.notice.Notices;
 import org.seepledger.job.ShownPicture;
+import org.seepledger.job.TracedNumber;
+import org.seepledger.job.WellPlace;
 import org.seepledger.prism.Prism;
 import org.seepledger.report.CellPlace;
 
@@ -31,9 +34,12 @@ public final class Session {
     private final IntegerProperty layer = new SimpleIntegerProperty();
     private final StringProperty selected = new SimpleStringProperty("");
     private final StringProperty lit = new SimpleStringProperty("");
+    private final ObjectProperty<List<TracedNumber.Cell>> marked = new SimpleObjectProperty<>(List.of());
+    private final ObjectProperty<Optional<RowAsked>> asked = new SimpleObjectProperty<>(Optional.empty());
     private final StringProperty solute = new SimpleStringProperty("");
     private final StringProperty status = new SimpleStringProperty("");
     private final Notices notices = new Notices();
+    private final ObjectProperty<List<WellPlace>> wells = new SimpleObjectProperty<>(List.of());
     private final ObjectProperty<FaceFlows> faceFlows = new SimpleObjectProperty<>(FaceFlows.NONE);
     private final ObjectProperty<Optional<CellPlace>> target = new SimpleObjectProperty<>(Optional.empty());
     private final ObjectProperty<Demand> demand = new SimpleObjectProperty<>(Demand.NONE);
@@ -57,6 +63,7 @@ public final class Session {
      */
     public void show(Optional<OpenSet> opened) {
         lit.set("");
+        marked.set(List.of());
         faceFlows.set(FaceFlows.NONE);
         solute.set("");
         transect.set("");
@@ -128,6 +135,16 @@ public final class Session {
         return lit;
     }
 
+    /** {@return the cells that are lit up, since a number rests on values in them} */
+    public ObjectProperty<List<TracedNumber.Cell>> marked() {
+        return marked;
+    }
+
+    /** {@return the row of the selected prism's budget whose origin is asked for; whoever answers empties it} */
+    public ObjectProperty<Optional<RowAsked>> asked() {
+        return asked;
+    }
+
     /** {@return what has been done, what to know, what was refused} */
     public Notices notices() {
         return notices;
@@ -141,6 +158,11 @@ public final class Session {
     /** {@return what the status line says can be done now} */
     public StringProperty status() {
         return status;
+    }
+
+    /** {@return the wells with their rates in the interval looked at} */
+    public ObjectProperty<List<WellPlace>> wells() {
+        return wells;
     }
 
     /** {@return what flows through the selected prism's faces, for arrows on the map} */

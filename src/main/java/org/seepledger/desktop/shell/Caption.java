@@ -31,6 +31,11 @@ final class Caption extends HBox {
         getChildren().addAll(mark, name, showing, gap, theme(model), button(Words.of("caption.actions"), actions, ""));
     }
 
+    /** Adds a button before the last two. */
+    void add(Node button) {
+        getChildren().add(getChildren().size() - 2, button);
+    }
+
     private static Button theme(ShellModel model) {
         Button theme = button("", model::switchTheme, "caption.theme.tip");
         theme.setId("theme");

@@ -2,6 +2,7 @@ package org.seepledger.desktop.shell;
 
 import java.util.EnumSet;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import javafx.geometry.Orientation;
 import javafx.scene.Node;
@@ -18,6 +19,7 @@ import org.seepledger.desktop.action.Actions;
 import org.seepledger.desktop.action.ActionsPage;
 import org.seepledger.desktop.notice.NoticeLine;
 import org.seepledger.desktop.notice.NoticePage;
+import org.seepledger.desktop.port.Settings;
 import org.seepledger.desktop.running.RunningList;
 import org.seepledger.desktop.running.RunningModel;
 import org.seepledger.desktop.running.RunningStrip;
@@ -30,9 +32,19 @@ public final class ShellView extends StackPane {
     private static final Set<KeyCode> WORKING_KEYS =
             EnumSet.of(KeyCode.TAB, KeyCode.ENTER, KeyCode.SPACE, KeyCode.DELETE, KeyCode.BACK_SPACE);
 
+    /** How wide the pane beside the map is at first, in logical pixels, at least, and as a share of the window. */
+    private static final double[] SIDE = {452, 0.3};
+
+    /** How high the pane below it is at first. */
+    private static final double[] BELOW = {196, 0.22};
+
     private final ShellModel model;
     private final Actions actions;
     private final Slots slots;
+    private final SplitPane across = new SplitPane();
+    private final SplitPane down = new SplitPane();
+    private final Optional<Fold> side;
+    private final Optional<Fold> below;
     private final BorderPane work = new BorderPane();
     private final StackPane veil = new StackPane();
     private final ActionsPage actionsPage;
@@ -47,8 +59,9 @@ public final class ShellView extends StackPane {
      * @param slots what is put into the frame
      * @param actions everything that can be done
      * @param running what runs beside the window
+     * @param settings keep how large panes are
      */
-    public ShellView(ShellModel model, Slots slots, Actions actions, RunningModel running) {
+    public ShellView(ShellModel model, Slots slots, Actions actions, RunningModel running, Settings settings) {
         this.model = model;
         this.slots = slots;
         this.actions = actions;
@@ -59,8 +72,14 @@ public final class ShellView extends StackPane {
                                 set.filter(open -> !open.solutes().isEmpty()).isPresent()),
                 this::lift);
         this.actionsPage = new ActionsPage(actions, this::lift);
-        work.setTop(new Caption(model, slots.showing(), this::showActions));
         work.setCenter(panes());
+        across.getItems().add(slots.map());
+        this.side = slots.ledger().map(pane -> new Fold(across, pane, SIDE[0], SIDE[1], settings, "side.width"));
+        this.below = slots.ribbon().map(pane -> new Fold(down, pane, BELOW[0], BELOW[1], settings, "below.height"));
+        Caption caption = new Caption(model, slots.showing(), this::showActions);
+        side.ifPresent(fold -> caption.add(fold.button("fold-side", "action.fold.side")));
+        below.ifPresent(fold -> caption.add(fold.button("fold-below", "action.fold.below")));
+        work.setTop(caption);
         this.noticePage = new NoticePage(model.session().notices(), this::lift);
         this.runningList = new RunningList(running, this::lift);
         work.setBottom(new Footer(
@@ -81,20 +100,19 @@ public final class ShellView extends StackPane {
     }
 
     private Node panes() {
-        SplitPane across = new SplitPane(slots.map());
-        slots.ledger().ifPresent(ledger -> {
-            across.getItems().add(ledger);
-            across.setDividerPositions(0.6);
-            SplitPane.setResizableWithParent(ledger, false);
-        });
-        SplitPane down = new SplitPane(across);
         down.setOrientation(Orientation.VERTICAL);
-        slots.ribbon().ifPresent(ribbon -> {
-            down.getItems().add(ribbon);
-            down.setDividerPositions(0.74);
-            SplitPane.setResizableWithParent(ribbon, false);
-        });
+        down.getItems().add(across);
         return down;
+    }
+
+    /** Folds the pane beside the map away, or shows it again. */
+    public void turnSide() {
+        side.ifPresent(Fold::turn);
+    }
+
+    /** Folds the pane below the map away, or shows it again. */
+    public void turnBelow() {
+        below.ifPresent(Fold::turn);
     }
 
     /** Shows the page of all actions. */
@@ -123,7 +141,8 @@ public final class ShellView extends StackPane {
 
     /** Moves the keyboard to the next pane. */
     public void nextPane() {
-        List<Node> panes = slots.panes();
+        List<Node> panes =
+                slots.panes().stream().filter(pane -> pane.getScene() != null).toList();
         Node owner = getScene().getFocusOwner();
         int here = -1;
         for (int pane = 0; pane < panes.size(); pane++) {

@@ -4,6 +4,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
+import java.util.concurrent.atomic.AtomicReference;
 import java.util.function.Consumer;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
@@ -12,11 +13,13 @@ import javafx.collections.ObservableList;
 import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.port.RecentFolders;
 import org.seepledger.desktop.session.Opening;
+import org.seepledger.desktop.task.EntryGuard;
 import org.seepledger.desktop.task.Lane;
 import org.seepledger.desktop.task.PaneState;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.words.FaultWords;
 import org.seepledger.desktop.words.Words;
+import org.seepledger.io.aquifer.AquiferReader;
 import org.seepledger.progress.Cancelled;
 
 /** What can be opened, and the opening of it. */
@@ -30,6 +33,9 @@ public final class WelcomeModel {
     private final Lane looking;
     private final ObservableList<Place> samples = FXCollections.observableArrayList();
     private final ObservableList<Place> recent = FXCollections.observableArrayList();
+    private final ReadOnlyObjectWrapper<Optional<Broken>> failed = new ReadOnlyObjectWrapper<>(Optional.empty());
+    private Consumer<List<Path>> loose = paths -> {};
+    private Consumer<Path> wrong = folder -> {};
     private final ReadOnlyObjectWrapper<PaneState> state = new ReadOnlyObjectWrapper<>(PaneState.READY);
 
     /**
@@ -107,10 +113,13 @@ public final class WelcomeModel {
     }
 
     private void read(Path folder) {
+        failed.set(Optional.empty());
         state.set(PaneState.working(Words.of("open.working", folder.getFileName())));
+        AtomicReference<Optional<Broken>> broken = new AtomicReference<>(Optional.empty());
         opening.run(
                 progress -> {
                     progress.begin(folder.toString(), 0);
+                    broken.set(Broken.of(folder));
                     return Opening.of(folder);
                 },
                 result -> {
@@ -118,17 +127,70 @@ public final class WelcomeModel {
                     folders.remember(result.set().path());
                     opened.accept(result);
                 },
-                fault -> state.set(
-                        fault instanceof Cancelled ? PaneState.READY : PaneState.failed(FaultWords.of(fault))));
+                fault -> {
+                    boolean stopped = fault instanceof Cancelled;
+                    failed.set(stopped ? Optional.empty() : broken.get());
+                    state.set(stopped ? PaneState.READY : PaneState.failed(FaultWords.of(fault)));
+                });
     }
 
     /**
-     * Opens the first folder of several that were dropped.
+     * Takes files and folders that make no aquifer folder.
+     *
+     * @param taker gets them
+     */
+    public void whenLoose(Consumer<List<Path>> taker) {
+        loose = taker;
+    }
+
+    /** Goes to where loose files are made into an aquifer folder. */
+    void bringLoose() {
+        loose.accept(List.of());
+    }
+
+    /**
+     * Takes folders whose description is wrong.
+     *
+     * @param taker gets them
+     */
+    public void whenWrong(Consumer<Path> taker) {
+        wrong = taker;
+    }
+
+    /** Mends the description of the folder that could not be opened; without one, brings its files. */
+    void mendFailed() {
+        failed.get().ifPresent(broken -> {
+            if (broken.described()) {
+                wrong.accept(broken.folder());
+            } else {
+                loose.accept(List.of(broken.folder()));
+            }
+        });
+    }
+
+    /** {@return the folder that could not be opened, if it is so} */
+    ReadOnlyObjectProperty<Optional<Broken>> failed() {
+        return failed.getReadOnlyProperty();
+    }
+
+    /**
+     * Opens the first aquifer folder of several files and folders that were dropped; if there is none, they are loose files.
      *
      * @param dropped the files and folders
      */
     public void drop(List<Path> dropped) {
-        Optional<Path> first = dropped.stream().findFirst();
-        first.ifPresent(this::open);
+        opening.run(
+                progress -> dropped.stream().filter(WelcomeModel::isAquifer).findFirst(),
+                first -> first.ifPresentOrElse(this::open, () -> {
+                    if (!dropped.isEmpty()) {
+                        loose.accept(dropped);
+                    }
+                }),
+                fault -> state.set(PaneState.failed(FaultWords.of(fault))));
+    }
+
+    private static boolean isAquifer(Path path) {
+        EntryGuard.enter();
+        return path.endsWith(AquiferReader.FILE) || Files.isRegularFile(path.resolve(AquiferReader.FILE));
     }
 }

@@ -1,6 +1,5 @@
 package org.seepledger.desktop.welcome;
 
-import java.io.File;
 import java.nio.file.Path;
 import javafx.collections.ListChangeListener;
 import javafx.collections.ObservableList;
@@ -10,8 +9,6 @@ import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.Tooltip;
-import javafx.scene.input.DragEvent;
-import javafx.scene.input.TransferMode;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.StackPane;
@@ -28,6 +25,8 @@ public final class WelcomeView extends StackPane {
     private final WelcomeModel model;
     private final VBox drop = new VBox();
     private final Label fault = new Label();
+    private final Button mend = new Button();
+    private final HBox failure = new HBox(12, fault, mend);
 
     /**
      * Builds the page.
@@ -47,9 +46,7 @@ public final class WelcomeView extends StackPane {
         scroll.setFitToWidth(true);
         scroll.setFitToHeight(true);
         getChildren().add(scroll);
-        setOnDragOver(this::onDragOver);
-        setOnDragExited(drag -> drop.getStyleClass().remove("over"));
-        setOnDragDropped(this::onDropped);
+        FolderDrop.on(this, model, this::mark);
     }
 
     private static Node title() {
@@ -67,17 +64,26 @@ public final class WelcomeView extends StackPane {
         fault.setId("open-fault");
         fault.setWrapText(true);
         fault.setMaxWidth(WIDTH);
-        fault.getStyleClass().add("sl-fault");
+        HBox.setHgrow(fault, Priority.ALWAYS);
+        mend.setId("mend-folder");
+        mend.setMinWidth(USE_PREF_SIZE);
+        mend.setOnAction(pressed -> model.mendFailed());
+        failure.getStyleClass().add("sl-fault");
+        failure.setAlignment(Pos.CENTER_LEFT);
+        failure.setMaxWidth(WIDTH);
         model.state().addListener((state, before, after) -> showFault(after));
         showFault(model.state().get());
-        return fault;
+        return failure;
     }
 
     private void showFault(PaneState state) {
         boolean failed = state.phase() == PaneState.Phase.FAILED;
         fault.setText(failed ? Words.of("open.failed", state.words()) : "");
-        fault.setVisible(failed);
-        fault.setManaged(failed);
+        failure.setVisible(failed);
+        failure.setManaged(failed);
+        mend.setVisible(model.failed().get().isPresent());
+        boolean described = model.failed().get().filter(Broken::described).isPresent();
+        mend.setText(described ? Words.of("welcome.mend") : Words.of("welcome.files"));
     }
 
     private Node columns() {
@@ -150,24 +156,19 @@ public final class WelcomeView extends StackPane {
         choose.setDefaultButton(true);
         choose.setOnAction(pressed -> model.choose());
         drop.getStyleClass().add("sl-drop");
-        drop.getChildren().addAll(words, choose);
+        Button bring = new Button(Words.of("welcome.loose"));
+        bring.setId("bring-loose");
+        bring.setOnAction(pressed -> model.bringLoose());
+        HBox buttons = new HBox(10, choose, bring);
+        buttons.setAlignment(Pos.CENTER);
+        drop.getChildren().addAll(words, buttons);
         return drop;
     }
 
-    private void onDragOver(DragEvent drag) {
-        if (drag.getDragboard().hasFiles()) {
-            drag.acceptTransferModes(TransferMode.COPY, TransferMode.LINK);
-            if (!drop.getStyleClass().contains("over")) {
-                drop.getStyleClass().add("over");
-            }
-        }
-        drag.consume();
-    }
-
-    private void onDropped(DragEvent drag) {
+    private void mark(boolean over) {
         drop.getStyleClass().remove("over");
-        model.drop(drag.getDragboard().getFiles().stream().map(File::toPath).toList());
-        drag.setDropCompleted(true);
-        drag.consume();
+        if (over) {
+            drop.getStyleClass().add("over");
+        }
     }
 }

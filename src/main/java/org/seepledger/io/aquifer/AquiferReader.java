@@ -76,6 +76,20 @@ public final class AquiferReader {
         return open(description, "aquifer", DataFolder.of(files, FILE));
     }
 
+    /**
+     * Opens an aquifer folder with another description than the one that lies in it.
+     *
+     * @param description what could stand in its place
+     * @param folder the folder that holds the data files
+     * @return the set, to be closed
+     * @throws DataFault if something is wrong with it
+     */
+    public static AquiferFolder open(Path description, Path folder) {
+        Path absolute = folder.toAbsolutePath().normalize();
+        String name = String.valueOf(absolute.getFileName());
+        return open(description, name, DataFolder.holding(absolute.resolve(FILE), FILE));
+    }
+
     private static AquiferFolder open(Path file, String folderName, DataFolder folder) {
         JsonNode root = JsonFile.read(file, FILE);
         SchemaCheck.check(root);

@@ -9,6 +9,7 @@ import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
 import java.util.Comparator;
+import java.util.List;
 import org.seepledger.fault.DataFault;
 
 /** Checks {@code aquifer.json} against its schema. */
@@ -35,12 +36,18 @@ final class SchemaCheck {
      * @throws DataFault for the first thing that is wrong: unknown keys first, then missing ones, then the rest
      */
     static void check(JsonNode root) {
-        SCHEMA.validate(root).stream()
+        faults(root).stream().findFirst().ifPresent(fault -> {
+            throw fault;
+        });
+    }
+
+    /** {@return everything that is wrong: unknown keys first, then missing ones, then the rest} */
+    static List<DataFault> faults(JsonNode root) {
+        return SCHEMA.validate(root).stream()
                 .filter(message -> !isOneWayOfSeveral(message))
-                .min(Comparator.comparingInt(SchemaCheck::rank))
-                .ifPresent(message -> {
-                    throw new SchemaWords(SCHEMA.getSchemaNode(), message).fault();
-                });
+                .sorted(Comparator.comparingInt(SchemaCheck::rank))
+                .map(message -> new SchemaWords(SCHEMA.getSchemaNode(), message).fault())
+                .toList();
     }
 
     /** Where none of several ways fits, that is said once, not what each of them lacks. */

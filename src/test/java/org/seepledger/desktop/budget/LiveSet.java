@@ -59,6 +59,11 @@ public final class LiveSet implements AutoCloseable {
         session.selected().set(prisms.get(0).name());
     }
 
+    /** A set in a folder. */
+    public static LiveSet of(Path folder) {
+        return new LiveSet(folder);
+    }
+
     /** The valley: 24 dated intervals, four prisms, storage known; it closes. */
     public static LiveSet valley() {
         return new LiveSet(Path.of("sample-aquifers/valley"));

@@ -2,17 +2,28 @@ package org.seepledger.desktop.closure;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.List;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import org.seepledger.balance.Periods;
 import org.seepledger.desktop.budget.LiveSet;
 import org.seepledger.desktop.session.Session;
+import org.seepledger.desktop.task.DirectTasks;
 import org.seepledger.report.Answer;
 
 class ClosureModelTest {
 
+    private static ClosureModel model(LiveSet set) {
+        return new ClosureModel(set.session, set.live, set.reading, new DirectTasks());
+    }
+
     @Test
     void aBudgetThatClosesSaysSoAndShowsNoCells() {
         try (LiveSet valley = LiveSet.valley()) {
-            ClosureModel model = new ClosureModel(valley.session, valley.live, valley.reading);
+            ClosureModel model = model(valley);
             assertThat(model.points().get(0).topic()).isEqualTo(Answer.Topic.CLOSURE);
             assertThat(model.points().get(0).text()).startsWith("Closes to rounding: less than ");
             assertThat(model.spots()).isEmpty();
@@ -26,7 +37,7 @@ class ClosureModelTest {
     @Test
     void aBudgetThatDoesNotCloseLeadsToItsCellsOnTheMap() {
         try (LiveSet terrace = LiveSet.terrace()) {
-            ClosureModel model = new ClosureModel(terrace.session, terrace.live, terrace.reading);
+            ClosureModel model = model(terrace);
             assertThat(model.points().get(0).text()).startsWith("Closure error ");
             assertThat(model.spots()).hasSize(5);
             assertThat(model.leads()).isNotEmpty();
@@ -42,11 +53,35 @@ class ClosureModelTest {
     @Test
     void figuresAreInTheUnitChosen() {
         try (LiveSet terrace = LiveSet.terrace()) {
-            ClosureModel model = new ClosureModel(terrace.session, terrace.live, terrace.reading);
+            ClosureModel model = model(terrace);
             assertThat(model.points().get(0).text()).contains("m³/d");
             terrace.reading.rateUnit().set("L/s");
             assertThat(model.points().get(0).text()).contains("L/s").doesNotContain("m³/d");
             assertThat(model.spots().get(0).imbalance()).endsWith("L/s");
+        }
+    }
+
+    @Test
+    void thePeriodShownHasCellsOfItsOwn(@TempDir Path folder) throws IOException {
+        try (var sample = Files.list(Path.of("sample-aquifers/valley"))) {
+            for (Path file : sample.toList()) {
+                Files.copy(file, folder.resolve(file.getFileName()));
+            }
+        }
+        Path described = folder.resolve("aquifer.json");
+        Files.writeString(described, Files.readString(described).replace("\"specific_yield.tif\"", "0.02"));
+        try (LiveSet wrong = LiveSet.of(folder)) {
+            ClosureModel model = model(wrong);
+            wrong.reading.every().set(Periods.Every.MONTH);
+            assertThat(model.period().get()).isEqualTo("2021-10");
+            assertThat(model.spotsOfPeriod()).hasSize(5);
+            List<Spot> october = List.copyOf(model.spotsOfPeriod());
+            wrong.session.interval().set(7);
+            assertThat(model.period().get()).isEqualTo("2022-05");
+            assertThat(List.copyOf(model.spotsOfPeriod())).isNotEqualTo(october);
+            wrong.reading.every().set(Periods.Every.RECORD);
+            assertThat(model.spotsOfPeriod()).isEmpty();
+            assertThat(model.spots()).hasSize(5);
         }
     }
 }

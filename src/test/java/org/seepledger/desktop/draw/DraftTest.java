@@ -35,7 +35,7 @@ class DraftTest {
     private final DraftModel model = new DraftModel(session);
     private final DraftHand hand = new DraftHand(model);
     private final DraftFiles files = new DraftFiles(model, new DirectTasks(), answers, answers);
-    private final CardModel card = new CardModel(model);
+    private final CardModel card = new CardModel(model, new LidSurfaces(model, new DirectTasks(), answers));
     private final List<Opening> opened = new ArrayList<>();
 
     @BeforeEach
@@ -52,6 +52,7 @@ class DraftTest {
         Opening opening = Opening.of(folder);
         opened.add(opening);
         session.show(Optional.of(opening.set()));
+        session.wells().set(opening.set().workbench().wells(0));
         files.begin(opening);
     }
 
@@ -333,7 +334,7 @@ class DraftTest {
         assertThat(card.topText()).isEqualTo("98.5");
         assertThat(session.selectedPrism().orElseThrow().range()).isInstanceOf(VerticalRange.Elevations.class);
         card.lids("no such.tif", "");
-        assertThat(session.status().get()).contains("An elevation is a number");
+        assertThat(session.status().get()).contains("no such.tif").contains("does not exist");
         card.lids("", "");
         assertThat(card.layersText()).isEmpty();
         card.reorder(1);

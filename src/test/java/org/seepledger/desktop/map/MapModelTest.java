@@ -61,7 +61,7 @@ class MapModelTest {
         assertThat(shown().request().quantity().kind()).isEqualTo(MapQuantity.Kind.HEAD);
         assertThat(model.camera().get().x(500000)).isBetween(48.0, 1000.0);
         assertThat(model.camera().get().y(5200000)).isBetween(48.0, 700.0);
-        assertThat(model.wells().get()).isNotEmpty();
+        assertThat(session.wells().get()).isNotEmpty();
         assertThat(model.contours().lines().get()).isNotEmpty();
         assertThat(model.flux().flux().get()).isPresent();
     }
@@ -188,6 +188,6 @@ class MapModelTest {
         session.show(Optional.empty());
         assertThat(model.values().view().get()).isEmpty();
         assertThat(model.values().state().get().phase()).isEqualTo(PaneState.Phase.EMPTY);
-        assertThat(model.wells().get()).isEmpty();
+        assertThat(session.wells().get()).isEmpty();
     }
 }

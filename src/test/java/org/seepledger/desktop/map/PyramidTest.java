@@ -55,4 +55,16 @@ class PyramidTest {
         assertThat(pyramid.cells(0)).containsExactly(1, 2);
         assertThat(pyramid.cells(1)).containsExactly(3, 4);
     }
+
+    @Test
+    void valuesThatDifferByRoundingAreFlat() {
+        double[] same = new double[25];
+        for (int i = 0; i < same.length; i++) {
+            same[i] = 101.3 + 1e-9 * i;
+        }
+        assertThat(even(5, 5, same).isFlat()).isTrue();
+        same[7] = Double.NaN;
+        same[8] = 101.31;
+        assertThat(even(5, 5, same).isFlat()).isFalse();
+    }
 }

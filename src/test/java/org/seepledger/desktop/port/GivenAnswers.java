@@ -4,11 +4,13 @@ import java.nio.file.Path;
 import java.util.ArrayDeque;
 import java.util.ArrayList;
 import java.util.Deque;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 
 /** A machine that answers what a test told it to, and keeps what it was given. */
-public final class GivenAnswers implements FileDialogs, CopyBoard, Questions, RecentFolders, Opener {
+public final class GivenAnswers implements FileDialogs, CopyBoard, Questions, RecentFolders, Settings, Opener {
 
     /** The answers to come, in order: paths for dialogs, numbers for questions. */
     public final Deque<Optional<Path>> paths = new ArrayDeque<>();
@@ -21,6 +23,9 @@ public final class GivenAnswers implements FileDialogs, CopyBoard, Questions, Re
 
     /** What was copied: text or tab-separated lines, then HTML if there was any. */
     public final List<String> copied = new ArrayList<>();
+
+    /** What is kept from run to run. */
+    public final Map<String, String> settings = new HashMap<>();
 
     /** What was opened. */
     public final List<Path> opened = new ArrayList<>();
@@ -36,6 +41,11 @@ public final class GivenAnswers implements FileDialogs, CopyBoard, Questions, Re
     @Override
     public Optional<Path> fileToRead(String title, Kind kind) {
         return folder(title);
+    }
+
+    @Override
+    public List<Path> filesToRead(String title) {
+        return folder(title).map(List::of).orElse(List.of());
     }
 
     @Override
@@ -58,6 +68,16 @@ public final class GivenAnswers implements FileDialogs, CopyBoard, Questions, Re
     @Override
     public void text(String text) {
         copied.add(text);
+    }
+
+    @Override
+    public Optional<String> get(String key) {
+        return Optional.ofNullable(settings.get(key));
+    }
+
+    @Override
+    public void put(String key, String value) {
+        settings.put(key, value);
     }
 
     @Override

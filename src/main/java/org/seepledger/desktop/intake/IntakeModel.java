@@ -1,0 +1,367 @@
+package org.seepledger.desktop.intake;
+
+import java.nio.file.Path;
+import java.time.Duration;
+import java.util.ArrayList;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Optional;
+import java.util.Set;
+import java.util.function.Consumer;
+import java.util.function.UnaryOperator;
+import javafx.beans.property.BooleanProperty;
+import javafx.beans.property.IntegerProperty;
+import javafx.beans.property.ReadOnlyObjectProperty;
+import javafx.beans.property.ReadOnlyObjectWrapper;
+import javafx.beans.property.SimpleBooleanProperty;
+import javafx.beans.property.SimpleIntegerProperty;
+import javafx.beans.property.SimpleStringProperty;
+import javafx.beans.property.StringProperty;
+import org.seepledger.desktop.port.FileDialogs;
+import org.seepledger.desktop.task.EntryGuard;
+import org.seepledger.desktop.task.Lane;
+import org.seepledger.desktop.task.PaneState;
+import org.seepledger.desktop.task.Tasks;
+import org.seepledger.desktop.words.FaultWords;
+import org.seepledger.desktop.words.Words;
+import org.seepledger.intake.Composition;
+import org.seepledger.intake.Item;
+import org.seepledger.intake.LooseFile;
+import org.seepledger.intake.Plan;
+import org.seepledger.intake.Proposal;
+import org.seepledger.intake.Use;
+import org.seepledger.intake.Wishes;
+import org.seepledger.job.IntakeJob;
+import org.seepledger.job.RasterPreview;
+import org.seepledger.progress.Cancelled;
+
+/** Loose files, what they are taken for, and the aquifer folder that they make. */
+public final class IntakeModel {
+
+    private static final Duration REST = Duration.ofMillis(250);
+
+    private final FileDialogs dialogs;
+    private final Consumer<Path> open;
+    private final Lane looking;
+    private final Lane making;
+    private final Lane checking;
+    private final Lane writing;
+    private final Lane previewing;
+    private final Set<Path> brought = new LinkedHashSet<>();
+    private final BooleanProperty shown = new SimpleBooleanProperty();
+    private final IntegerProperty chosen = new SimpleIntegerProperty(-1);
+    private final StringProperty target = new SimpleStringProperty("");
+    private final ReadOnlyObjectWrapper<Optional<Plan>> plan = new ReadOnlyObjectWrapper<>(Optional.empty());
+    private final ReadOnlyObjectWrapper<Optional<Made>> made = new ReadOnlyObjectWrapper<>(Optional.empty());
+    private final ReadOnlyObjectWrapper<PaneState> state =
+            new ReadOnlyObjectWrapper<>(PaneState.empty(Words.of("intake.empty")));
+    private final ReadOnlyObjectWrapper<Check> check = new ReadOnlyObjectWrapper<>(Check.NONE);
+    private final ReadOnlyObjectWrapper<PaneState> written = new ReadOnlyObjectWrapper<>(PaneState.READY);
+
+    /**
+     * What the check says.
+     *
+     * @param state how it stands
+     * @param text what {@code inspect} says; empty as long as it has not said it
+     */
+    record Check(PaneState state, String text) {
+
+        static final Check NONE = new Check(PaneState.READY, "");
+    }
+
+    /**
+     * Makes the model.
+     *
+     * @param tasks looks, checks and writes
+     * @param dialogs asks for files and folders
+     * @param open opens an aquifer folder in the window
+     */
+    public IntakeModel(Tasks tasks, FileDialogs dialogs, Consumer<Path> open) {
+        this.dialogs = dialogs;
+        this.open = open;
+        this.looking = tasks.latest("task.intake.looking");
+        this.making = tasks.latest("task.intake.making");
+        this.checking = tasks.latest("task.intake.checking");
+        this.writing = tasks.latest("task.intake.writing");
+        this.previewing = tasks.latest("task.intake.preview");
+    }
+
+    /** {@return whether the assistant is before the user} */
+    public BooleanProperty shown() {
+        return shown;
+    }
+
+    /** {@return the files and what they are taken for, once there are any} */
+    public ReadOnlyObjectProperty<Optional<Plan>> plan() {
+        return plan.getReadOnlyProperty();
+    }
+
+    /** {@return what they make, once it is worked out} */
+    ReadOnlyObjectProperty<Optional<Made>> made() {
+        return made.getReadOnlyProperty();
+    }
+
+    /** {@return how the looking stands} */
+    ReadOnlyObjectProperty<PaneState> state() {
+        return state.getReadOnlyProperty();
+    }
+
+    /** {@return what the check says} */
+    ReadOnlyObjectProperty<Check> check() {
+        return check.getReadOnlyProperty();
+    }
+
+    /** {@return how the writing stands} */
+    ReadOnlyObjectProperty<PaneState> written() {
+        return written.getReadOnlyProperty();
+    }
+
+    /** {@return which item is looked at, from 0; −1 for the set as a whole} */
+    IntegerProperty chosen() {
+        return chosen;
+    }
+
+    /** {@return where the new folder is to be} */
+    StringProperty target() {
+        return target;
+    }
+
+    /** Asks for files and adds them. */
+    void addFiles() {
+        List<Path> files = dialogs.filesToRead(Words.of("intake.files"));
+        if (!files.isEmpty()) {
+            bring(files);
+        }
+    }
+
+    /** Asks for a folder and adds its files. */
+    void addFolder() {
+        dialogs.folder(Words.of("intake.folder")).ifPresent(folder -> bring(List.of(folder)));
+    }
+
+    /** Forgets all files. */
+    void clear() {
+        brought.clear();
+        looking.cancel();
+        making.cancel();
+        checking.cancel();
+        plan.set(Optional.empty());
+        made.set(Optional.empty());
+        check.set(Check.NONE);
+        written.set(PaneState.READY);
+        state.set(PaneState.empty(Words.of("intake.empty")));
+    }
+
+    /**
+     * Shows the assistant, and adds files and folders.
+     *
+     * @param paths the files and folders; none to show what is there
+     */
+    public void bring(List<Path> paths) {
+        shown.set(true);
+        if (paths.isEmpty()) {
+            return;
+        }
+        brought.addAll(
+                paths.stream().map(path -> path.toAbsolutePath().normalize()).toList());
+        List<Path> all = new ArrayList<>(brought);
+        state.set(PaneState.working(Words.of("intake.looking")));
+        looking.run(
+                progress -> {
+                    EntryGuard.enter();
+                    return Proposal.of(IntakeJob.look(all, progress));
+                },
+                this::found,
+                fault -> {
+                    brought.removeAll(paths);
+                    state.set(isStopped(fault) ? rest() : PaneState.failed(FaultWords.of(fault)));
+                });
+    }
+
+    private void found(Plan looked) {
+        Plan merged = plan.get().map(before -> Corrections.kept(before, looked)).orElse(looked);
+        state.set(merged.items().isEmpty() ? PaneState.empty(Words.of("intake.nothing")) : PaneState.READY);
+        if (target.get().isEmpty() || plan.get().isEmpty()) {
+            target.set(free(looked.root()).toString());
+        }
+        chosen.set(-1);
+        take(merged);
+    }
+
+    /** A folder beside the one that holds the files. */
+    private static Path free(Path root) {
+        Path name = root.getFileName();
+        return name == null ? root.resolve("aquifer") : root.resolveSibling(name + "-aquifer");
+    }
+
+    private void take(Plan next) {
+        plan.set(Optional.of(next));
+        written.set(PaneState.READY);
+        checking.cancel();
+        making.runAfter(
+                REST,
+                progress -> {
+                    EntryGuard.enter();
+                    return Made.of(next);
+                },
+                this::take,
+                fault -> check.set(new Check(PaneState.failed(FaultWords.of(fault)), "")));
+    }
+
+    private void take(Made next) {
+        made.set(Optional.of(next));
+        Composition copied = next.copied();
+        if (!copied.isSound()) {
+            check.set(new Check(PaneState.empty(Words.of("intake.check.waits")), ""));
+            return;
+        }
+        check.set(new Check(
+                PaneState.working(Words.of("intake.checking")), check.get().text()));
+        int threads = Math.max(1, Runtime.getRuntime().availableProcessors() - 1);
+        checking.run(
+                progress -> {
+                    EntryGuard.enter();
+                    return IntakeJob.check(copied, threads, progress);
+                },
+                text -> check.set(new Check(PaneState.READY, text)),
+                fault -> check.set(
+                        isStopped(fault) ? Check.NONE : new Check(PaneState.failed(FaultWords.of(fault)), "")));
+    }
+
+    private static boolean isStopped(Throwable fault) {
+        return fault instanceof Cancelled;
+    }
+
+    private PaneState rest() {
+        return plan.get().isEmpty() ? PaneState.empty(Words.of("intake.empty")) : PaneState.READY;
+    }
+
+    /** {@return the item looked at; empty for the set as a whole} */
+    Optional<Item> item() {
+        int index = chosen.get();
+        return plan.get()
+                .filter(now -> index >= 0 && index < now.items().size())
+                .map(now -> now.items().get(index));
+    }
+
+    /**
+     * Makes something else of the item looked at.
+     *
+     * @param change the change
+     */
+    void change(UnaryOperator<Item> change) {
+        item().ifPresent(item -> {
+            Plan now = plan.get().orElseThrow();
+            Item changed = change.apply(item);
+            if (!changed.equals(item)) {
+                take(now.with(chosen.get(), changed));
+            }
+        });
+    }
+
+    /**
+     * Changes what is made of a part of the item looked at.
+     *
+     * @param index which use, from 0
+     * @param change the change
+     */
+    void changeUse(int index, UnaryOperator<Use> change) {
+        change(item -> item.with(index, change.apply(item.uses().get(index))));
+    }
+
+    /**
+     * Says something of the set as a whole.
+     *
+     * @param topic what of
+     * @param text what
+     */
+    void say(Wishes.Topic topic, String text) {
+        plan.get().ifPresent(now -> {
+            Wishes said = now.wishes().with(topic, text);
+            if (!said.equals(now.wishes())) {
+                take(now.with(said));
+            }
+        });
+    }
+
+    /** {@return the lines of the list} */
+    List<ItemRow> rows() {
+        return ItemRows.of(plan.get(), made.get());
+    }
+
+    /**
+     * Reads a band to be looked at.
+     *
+     * @param file the raster
+     * @param band from 0
+     * @param done gets it
+     */
+    void preview(LooseFile.Raster file, int band, Consumer<RasterPreview> done) {
+        previewing.run(
+                progress -> {
+                    EntryGuard.enter();
+                    return RasterPreview.of(file.path(), file.shownName(), band, progress);
+                },
+                done,
+                fault -> written.set(PaneState.failed(FaultWords.of(fault))));
+    }
+
+    /** Asks for a folder in which the new one is to be. */
+    void chooseTarget() {
+        dialogs.folder(Words.of("intake.target"))
+                .ifPresent(folder -> target.set(
+                        folder.resolve(Path.of(target.get()).getFileName()).toString()));
+    }
+
+    /** Writes the new folder and opens it. */
+    void write() {
+        Path folder = Path.of(target.get());
+        made.get()
+                .filter(now -> now.copied().isSound())
+                .ifPresent(now -> write(Words.of("intake.writing", folder), folder, threads -> progress -> {
+                    IntakeJob.write(now.copied(), folder, threads, progress);
+                    return folder;
+                }));
+    }
+
+    /** Writes the description of files where they lie, and opens their folder. */
+    void describe() {
+        made.get().filter(now -> now.placed().isSound()).ifPresent(now -> {
+            Path root = now.plan().root();
+            write(Words.of("intake.writing", root), root, threads -> progress -> {
+                IntakeJob.describe(now.placed(), root, threads, progress);
+                return root;
+            });
+        });
+    }
+
+    /** Makes the work of writing. */
+    @FunctionalInterface
+    private interface Writing {
+
+        org.seepledger.desktop.task.Work<Path> with(int threads);
+    }
+
+    private void write(String words, Path folder, Writing work) {
+        written.set(PaneState.working(words));
+        org.seepledger.desktop.task.Work<Path> write =
+                work.with(Math.max(1, Runtime.getRuntime().availableProcessors() - 1));
+        writing.run(
+                progress -> {
+                    EntryGuard.enter();
+                    return write.call(progress);
+                },
+                done -> {
+                    written.set(PaneState.READY);
+                    shown.set(false);
+                    open.accept(folder);
+                },
+                fault -> written.set(isStopped(fault) ? PaneState.READY : PaneState.failed(FaultWords.of(fault))));
+    }
+
+    /** Ends the writing; nothing is left of it. */
+    void cancel() {
+        writing.cancel();
+        written.set(PaneState.READY);
+    }
+}

@@ -1,0 +1,169 @@
+package org.seepledger.desktop.intake;
+
+import java.util.List;
+import java.util.function.Consumer;
+import javafx.scene.control.Button;
+import javafx.scene.control.Label;
+import javafx.scene.control.ScrollPane;
+import javafx.scene.control.TextArea;
+import javafx.scene.control.TextField;
+import javafx.scene.layout.FlowPane;
+import javafx.scene.layout.HBox;
+import javafx.scene.layout.Priority;
+import javafx.scene.layout.VBox;
+import org.seepledger.desktop.task.PaneState;
+import org.seepledger.desktop.words.Words;
+import org.seepledger.intake.Composition;
+import org.seepledger.intake.Finding;
+
+/** What the files make: what stands in the way, what the check says, and the writing. */
+final class OutcomePane extends VBox {
+
+    private final IntakeModel model;
+    private final FindingsBox findings;
+    private final Label verdict = new Label();
+    private final TextArea checked = new TextArea();
+    private final TextField target = new TextField();
+    private final Label size = new Label();
+    private final Label obstacles = new Label();
+    private final Label written = new Label();
+    private final Button write = new Button(Words.of("intake.write"));
+    private final Button describe = new Button(Words.of("intake.describe"));
+    private final Button cancel = new Button(Words.of("intake.cancel"));
+
+    OutcomePane(IntakeModel model, Consumer<Finding> go) {
+        super(10);
+        this.model = model;
+        this.findings = new FindingsBox(go);
+        setId("intake-outcome");
+        getStyleClass().add("sl-intake-outcome");
+        verdict.setId("intake-verdict");
+        verdict.setWrapText(true);
+        verdict.setMinHeight(USE_PREF_SIZE);
+        checked.setId("intake-check");
+        checked.setEditable(false);
+        checked.getStyleClass().add("sl-typed");
+        checked.setPrefRowCount(12);
+        VBox content = new VBox(10, findings, checked);
+        VBox.setVgrow(checked, Priority.ALWAYS);
+        ScrollPane scroll = new ScrollPane(content);
+        scroll.setFitToWidth(true);
+        scroll.setFitToHeight(true);
+        VBox.setVgrow(scroll, Priority.ALWAYS);
+        getChildren().addAll(Form.heading("intake.heading.outcome"), verdict, scroll, writing());
+        model.made().addListener((now, before, after) -> show());
+        model.check().addListener((now, before, after) -> show());
+        model.written().addListener((now, before, after) -> show());
+        show();
+    }
+
+    private VBox writing() {
+        target.setId("intake-target");
+        target.textProperty().bindBidirectional(model.target());
+        HBox.setHgrow(target, Priority.ALWAYS);
+        Button choose = new Button(Words.of("intake.target.choose"));
+        choose.setOnAction(pressed -> model.chooseTarget());
+        write.setId("intake-write");
+        write.getStyleClass().add("accent");
+        write.setOnAction(pressed -> model.write());
+        describe.setId("intake-describe");
+        describe.setOnAction(pressed -> model.describe());
+        cancel.setId("intake-cancel");
+        cancel.setOnAction(pressed -> model.cancel());
+        for (Button button : List.of(write, describe, cancel, choose)) {
+            button.setMinWidth(USE_PREF_SIZE);
+        }
+        for (Label label : List.of(size, obstacles, written)) {
+            label.setWrapText(true);
+            label.setMinHeight(USE_PREF_SIZE);
+        }
+        size.getStyleClass().add("sl-small");
+        obstacles.getStyleClass().add("sl-small");
+        written.setId("intake-written");
+        Label where = new Label(Words.of("intake.target.label"));
+        where.getStyleClass().add("sl-muted");
+        return new VBox(
+                8,
+                where,
+                new HBox(6, target, choose),
+                size,
+                new FlowPane(8, 8, write, describe, cancel),
+                obstacles,
+                written);
+    }
+
+    private void show() {
+        PaneState check = model.check().get().state();
+        boolean failed = check.phase() == PaneState.Phase.FAILED;
+        verdict.getStyleClass().remove("sl-fault");
+        if (failed) {
+            verdict.getStyleClass().add("sl-fault");
+        }
+        checked.setText(model.check().get().text());
+        boolean told = !model.check().get().text().isEmpty();
+        checked.setVisible(told);
+        checked.setManaged(told);
+        findings.show(model.made().get().map(now -> now.copied().findings()).orElse(List.of()));
+        verdict.setText(model.made().get().map(this::verdict).orElse(""));
+        model.made().get().ifPresent(this::showWriting);
+        PaneState state = model.written().get();
+        boolean working = state.phase() == PaneState.Phase.WORKING;
+        written.getStyleClass().remove("sl-fault");
+        if (state.phase() == PaneState.Phase.FAILED) {
+            written.getStyleClass().add("sl-fault");
+        }
+        written.setText(state.words());
+        written.setManaged(!state.words().isEmpty());
+        cancel.setVisible(working);
+        cancel.setManaged(working);
+        boolean sound = !failed
+                && model.made()
+                        .get()
+                        .map(Made::copied)
+                        .filter(Composition::isSound)
+                        .isPresent();
+        write.setDisable(working || !sound);
+        describe.setDisable(working
+                || failed
+                || model.made()
+                        .get()
+                        .map(Made::placed)
+                        .filter(Composition::isSound)
+                        .isEmpty());
+    }
+
+    private String verdict(Made made) {
+        PaneState check = model.check().get().state();
+        if (check.phase() == PaneState.Phase.FAILED || check.phase() == PaneState.Phase.WORKING) {
+            return check.words();
+        }
+        long faults = made.copied().findings().stream()
+                .filter(finding -> finding.level() == Finding.Level.FAULT)
+                .count();
+        return faults == 0
+                ? Words.of("intake.check.sound")
+                : faults == 1 ? Words.of("intake.check.one") : Words.of("intake.check.faults", faults);
+    }
+
+    private void showWriting(Made made) {
+        size.setText(Words.of(
+                "intake.size", made.copied().copies().size(), bytes(made.plan().bytes())));
+        List<String> reasons = made.placed().obstacles();
+        obstacles.setText(
+                reasons.isEmpty()
+                        ? ""
+                        : reasons.size() == 1
+                                ? Words.of("intake.obstacle", reasons.get(0))
+                                : Words.of("intake.obstacles", reasons.get(0), reasons.size() - 1));
+        obstacles.setManaged(!reasons.isEmpty());
+    }
+
+    private static String bytes(long bytes) {
+        if (bytes < 1_000_000) {
+            return Words.of("intake.kilobytes", Math.max(1, Math.round(bytes / 1e3)));
+        }
+        return bytes < 1_000_000_000
+                ? Words.of("intake.megabytes", Math.round(bytes / 1e5) / 10.0)
+                : Words.of("intake.gigabytes", Math.round(bytes / 1e8) / 10.0);
+    }
+}
