@@ -40,7 +40,7 @@ public record MapQuantity(Kind kind, String source, String unit) {
             case SATURATED_THICKNESS -> "saturated thickness";
             case SOURCE -> source;
             case IMBALANCE -> "imbalance";
-            case CONCENTRATION -> source + " at the interval's end";
+            case CONCENTRATION -> source + ", interval's end";
             case MEAN_CONCENTRATION -> source + ", mean of both ends";
         };
     }

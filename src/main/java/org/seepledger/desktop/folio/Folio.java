@@ -97,9 +97,8 @@ public final class Folio {
         add("folio.origin", new OriginView(new OriginModel(session, reading, tasks, dialogs, copies)));
         this.transectsMark = add("folio.transects", new TransectView(transects));
         ofSolutes(transectsMark, transects.open());
-        marks.getChildren().add(new SubjectBox(session));
         SolutePanelModel panel = new SolutePanelModel(session, look, plumes);
-        pages.setTop(new VBox(marks, new SolutePanel(panel, () -> open(1))));
+        pages.setTop(new VBox(marks, new SolutePanel(panel, new SubjectBox(session), () -> open(1))));
         chosen.selectToggle(chosen.getToggles().get(0));
         this.ribbon = new ChartView(new ChartModel(session, live, reading, plumes, masses, answers), theme);
     }

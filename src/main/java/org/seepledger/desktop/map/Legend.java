@@ -49,6 +49,7 @@ final class Legend extends VBox {
         title.setTooltip(new Tooltip(Words.of("action.legend")));
         title.setOnAction(pressed -> turn());
         title.setMaxWidth(WIDTH);
+        title.setWrapText(true);
         bar.setOnMouseClicked(click -> turn());
         Region gap = new Region();
         HBox.setHgrow(gap, Priority.ALWAYS);

@@ -4,8 +4,10 @@ import java.util.Optional;
 import javafx.beans.value.ObservableValue;
 import javafx.geometry.Pos;
 import javafx.geometry.VPos;
+import javafx.scene.Node;
 import javafx.scene.control.CheckBox;
 import javafx.scene.control.ChoiceBox;
+import javafx.scene.control.Control;
 import javafx.scene.control.Hyperlink;
 import javafx.scene.control.Label;
 import javafx.scene.control.TextField;
@@ -17,7 +19,7 @@ import javafx.util.StringConverter;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.job.PlumeRequest.Threshold;
 
-/** What is chosen of a solute, above its pages; not there while the water is looked at. */
+/** Whose budget is looked at, and what is chosen of a solute, above all pages; not there where the set has no solutes. */
 public final class SolutePanel extends VBox {
 
     private static final double TRACK_WIDTH = 124;
@@ -29,23 +31,33 @@ public final class SolutePanel extends VBox {
      * Builds the panel.
      *
      * @param model what it shows
+     * @param subject chooses water or a solute
      * @param answers opens the page on which the warnings stand
      */
-    public SolutePanel(SolutePanelModel model, Runnable answers) {
+    public SolutePanel(SolutePanelModel model, Control subject, Runnable answers) {
         this.look = model.look();
         setId("solute-panel");
         getStyleClass().addAll("sl-choices", "sl-solute");
-        visibleProperty().bind(model.solute().isNotEmpty());
+        visibleProperty().bind(subject.visibleProperty());
         managedProperty().bind(visibleProperty());
         Hyperlink doubts = new Hyperlink();
         doubts.setId("solute-doubts");
         doubts.getStyleClass().addAll("sl-small", "sl-warning");
         doubts.textProperty().bind(model.doubts());
+        doubts.setTooltip(new Tooltip(Words.of("solute.doubts.tip")));
         doubts.setOnAction(pressed -> answers.run());
         doubts.managedProperty().bind(doubts.textProperty().isNotEmpty());
-        FlowPane choices = new FlowPane(12, 6, threshold(), track(), dispersion(), doubts);
+        FlowPane choices = new FlowPane(12, 6, subject, threshold(), track(), dispersion(), doubts);
+        choices.getChildren().stream().skip(1).forEach(node -> onlyOfSolutes(node, model));
         choices.setRowValignment(VPos.CENTER);
         getChildren().addAll(choices, line("solute-above", model.above()));
+    }
+
+    private static void onlyOfSolutes(Node node, SolutePanelModel model) {
+        if (!node.managedProperty().isBound()) {
+            node.visibleProperty().bind(model.solute().isNotEmpty());
+            node.managedProperty().bind(node.visibleProperty());
+        }
     }
 
     private static Label line(String id, ObservableValue<String> text) {
@@ -127,7 +139,7 @@ public final class SolutePanel extends VBox {
         return box;
     }
 
-    private static HBox row(javafx.scene.Node... nodes) {
+    private static HBox row(Node... nodes) {
         HBox row = new HBox(6, nodes);
         row.setAlignment(Pos.CENTER_LEFT);
         return row;

@@ -71,6 +71,7 @@ public final class SolutePanelModel {
         above.set(session.set().get().flatMap(this::above).orElse(""));
         doubts.set(plumes.record()
                 .get()
+                .filter(known -> !session.solute().get().isEmpty())
                 .map(Inquiry.Reply::answer)
                 .map(known -> known.warnings().size())
                 .filter(count -> count > 0)

@@ -52,8 +52,8 @@ class ConcentrationModelTest {
 
     @Test
     void aNonDetectReadsAsBelowItsLimitAndNotAsZero() {
-        assertThat(readout(5, 5)).isEqualTo("solvent at the interval's end <0.002000 mg/L, a non-detect");
-        assertThat(readout(65, 65)).startsWith("solvent at the interval's end ").doesNotContain("non-detect");
+        assertThat(readout(5, 5)).isEqualTo("solvent, interval's end <0.002000 mg/L, a non-detect");
+        assertThat(readout(65, 65)).startsWith("solvent, interval's end ").doesNotContain("non-detect");
     }
 
     @Test
