@@ -18,7 +18,12 @@ import com.tngtech.archunit.lang.ArchCondition;
 import com.tngtech.archunit.lang.ArchRule;
 import com.tngtech.archunit.lang.ConditionEvents;
 import com.tngtech.archunit.lang.SimpleConditionEvent;
+import java.io.PrintStream;
+import java.io.PrintWriter;
+import java.time.format.DateTimeFormatter;
+import java.util.Formatter;
 import java.util.List;
+import java.util.Scanner;
 
 /** The rules of the house: which package may know which, and who may do what. */
 @AnalyzeClasses(packages = "org.seepledger", importOptions = ImportOption.DoNotIncludeTests.class)
@@ -235,6 +240,33 @@ class HouseTest {
             .haveNameMatching(
                     "java\\.lang\\.Thread|java\\.util\\.concurrent\\.Executor(Service|s)|javafx\\.concurrent\\..*")
             .because("work that nobody can cancel or run at once in a test would come in by the back door");
+
+    @ArchTest
+    static final ArchRule NO_TEXT_DEPENDS_ON_THE_COUNTRY = noClasses()
+            .should()
+            .callMethod(String.class, "toLowerCase")
+            .orShould()
+            .callMethod(String.class, "toUpperCase")
+            .orShould()
+            .callMethod(String.class, "format", String.class, Object[].class)
+            .orShould()
+            .callMethod(String.class, "formatted", Object[].class)
+            .orShould()
+            .callMethod(PrintWriter.class, "printf", String.class, Object[].class)
+            .orShould()
+            .callMethod(PrintStream.class, "printf", String.class, Object[].class)
+            .orShould()
+            .callMethod(DateTimeFormatter.class, "ofPattern", String.class)
+            .orShould()
+            .callConstructor(Formatter.class)
+            .orShould()
+            .callConstructor(Scanner.class, String.class)
+            .orShould()
+            .dependOnClassesThat()
+            .haveNameMatching("java\\.text\\.(Decimal|Number|SimpleDate|Message)Format")
+            .because("where the language is Turkish, lower case of I is not i, and where it is German, a number has a"
+                    + " comma: files, parsers and drawings would differ from machine to machine. Name Locale.ROOT")
+            .allowEmptyShould(false);
 
     @ArchTest
     static final ArchRule NAMES_SAY_WHAT_A_THING_IS = noClasses()

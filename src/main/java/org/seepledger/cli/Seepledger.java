@@ -32,6 +32,8 @@ import picocli.CommandLine.IVersionProvider;
             TraceCommand.class,
             ExtractCommand.class,
             PlumeCommand.class,
+            ReviewCommand.class,
+            CompareCommand.class,
             DesktopCommand.class
         },
         mixinStandardHelpOptions = true,
@@ -45,7 +47,7 @@ import picocli.CommandLine.IVersionProvider;
             "    --prisms sample-aquifers/terrace/prisms.geojson --out budget",
             "",
             "Exit status: 0 done; 1 a fault of the program; 2 the command line is wrong; 3 the data are wrong;",
-            "4 done, but a closure error exceeds --max-closure-error."
+            "4 done, but a closure error exceeds --max-closure-error, or a review found a fault."
         })
 public final class Seepledger {
 
@@ -108,6 +110,12 @@ public final class Seepledger {
                 }
                 if (type == PlumeCommand.class) {
                     return type.cast(new PlumeCommand(terminal));
+                }
+                if (type == ReviewCommand.class) {
+                    return type.cast(new ReviewCommand(terminal));
+                }
+                if (type == CompareCommand.class) {
+                    return type.cast(new CompareCommand(terminal));
                 }
                 if (type == ExtractCommand.class) {
                     return type.cast(new ExtractCommand(terminal));

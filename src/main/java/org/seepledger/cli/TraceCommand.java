@@ -2,9 +2,15 @@ package org.seepledger.cli;
 
 import java.io.IOException;
 import java.nio.file.Path;
+import java.util.Optional;
 import java.util.concurrent.Callable;
+import org.seepledger.fault.UsageFault;
+import org.seepledger.job.SoluteTraceJob;
+import org.seepledger.job.SoluteTraceRequest;
 import org.seepledger.job.TraceJob;
 import org.seepledger.job.TraceRequest;
+import org.seepledger.progress.Progress;
+import org.seepledger.unit.Measure;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
@@ -15,7 +21,8 @@ import picocli.CommandLine.Parameters;
         name = "trace",
         description =
                 "Tells where a number of a water budget comes from: the stored values that add up to it, with the weight"
-                        + " that it has in it. Value × weight adds up to the row's net_rate.",
+                        + " that it has in it. Value × weight adds up to the row's net_rate. With --solute the same for a"
+                        + " solute's budget, back to the stored concentrations.",
         mixinStandardHelpOptions = true,
         sortOptions = false,
         footer = {
@@ -27,8 +34,12 @@ import picocli.CommandLine.Parameters;
             "    --prisms sample-aquifers/terrace/prisms.geojson \\",
             "    --row \"well field/interval 1/river side/1\" --out trace.csv",
             "",
-            "ROW is PRISM/PERIOD/ITEM/LAYER with the words of budget.csv; LAYER is * for a total, as \"residual/*\","
-                    + " and for an item over all its layers. It is"
+            "Which concentrations make up what leaves the depot's yard in a month:",
+            "  seepledger trace sample-aquifers/depot --prisms sample-aquifers/depot/prisms.geojson \\",
+            "    --solute solvent --row \"yard/interval 5/meadow side/1\" --out trace.csv",
+            "",
+            "ROW is PRISM/PERIOD/ITEM/LAYER with the words of budget.csv or plume.csv; LAYER is * for a total, as"
+                    + " \"residual/*\", and for an item over all its layers. It is"
                     + " held against the rows that there are, not split, so slashes in names stand as they are. Where"
                     + " several groups have an item of that name, write PRISM/PERIOD/GROUP/ITEM/LAYER.",
             "FILE is a CSV: file, place (band or column, and cell), value as it stands there, weight.",
@@ -54,6 +65,17 @@ final class TraceCommand implements Callable<Integer> {
     @Mixin
     private BudgetOptions options = new BudgetOptions();
 
+    @Option(
+            names = "--solute",
+            paramLabel = "NAME",
+            description = "Trace a row of this solute's budget, as in plume.csv.")
+    private String solute;
+
+    @Option(
+            names = "--dispersion",
+            description = "With --solute: book what disperses through faces, too, as plume does.")
+    private boolean dispersion;
+
     @Option(names = "--overwrite", description = "Replace FILE if an earlier trace wrote it.")
     private boolean overwrite;
 
@@ -63,7 +85,22 @@ final class TraceCommand implements Callable<Integer> {
 
     @Override
     public Integer call() throws IOException {
-        TraceRequest request = new TraceRequest(
+        if (solute == null && dispersion) {
+            throw new UsageFault("--dispersion goes with --solute: water does not disperse.");
+        }
+        Progress progress = terminal.progress(options.progress());
+        terminal.out()
+                .print(
+                        solute == null
+                                ? TraceJob.run(request(options.rateUnit()), progress)
+                                : SoluteTraceJob.run(
+                                        new SoluteTraceRequest(request(options.rateUnit("kg/d")), solute, dispersion),
+                                        progress));
+        return 0;
+    }
+
+    private TraceRequest request(Optional<Measure> rateUnit) {
+        return new TraceRequest(
                 aquifer,
                 prisms,
                 row,
@@ -71,12 +108,10 @@ final class TraceCommand implements Callable<Integer> {
                 options.every(),
                 options.periods(),
                 options.waterYearStart(),
-                options.rateUnit(),
+                rateUnit,
                 options.wells(),
                 options.clip(),
                 options.threads(),
                 overwrite);
-        terminal.out().print(TraceJob.run(request, terminal.progress(options.progress())));
-        return 0;
     }
 }

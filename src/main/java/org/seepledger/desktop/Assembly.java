@@ -3,6 +3,7 @@ package org.seepledger.desktop;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 import javafx.beans.binding.Bindings;
 import javafx.beans.binding.BooleanBinding;
 import javafx.scene.Node;
@@ -18,6 +19,7 @@ import org.seepledger.desktop.draw.DraftModel;
 import org.seepledger.desktop.draw.LidSurfaces;
 import org.seepledger.desktop.draw.Tray;
 import org.seepledger.desktop.folio.Folio;
+import org.seepledger.desktop.folio.Shelf;
 import org.seepledger.desktop.handover.HandoverModel;
 import org.seepledger.desktop.handover.HandoverPage;
 import org.seepledger.desktop.intake.IntakeModel;
@@ -35,14 +37,18 @@ import org.seepledger.desktop.port.Opener;
 import org.seepledger.desktop.port.Questions;
 import org.seepledger.desktop.port.RecentFolders;
 import org.seepledger.desktop.port.Settings;
+import org.seepledger.desktop.preferences.PreferencesModel;
 import org.seepledger.desktop.running.RunningModel;
 import org.seepledger.desktop.running.RunningStrip;
+import org.seepledger.desktop.section.SectionModel;
+import org.seepledger.desktop.section.SectionView;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Opening;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.shell.ShellModel;
 import org.seepledger.desktop.shell.ShellView;
 import org.seepledger.desktop.shell.Slots;
+import org.seepledger.desktop.size.Magnifier;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.theme.Dress;
 import org.seepledger.desktop.welcome.FolderDrop;
@@ -55,7 +61,8 @@ final class Assembly {
 
     private final Outside outside;
     private final Session session = new Session();
-    private final ShellModel shell = new ShellModel(session);
+    private final PreferencesModel preferences;
+    private final ShellModel shell;
     private final WelcomeModel welcome;
     private final IntakeModel intake;
     private final MendModel mend;
@@ -67,6 +74,8 @@ final class Assembly {
     private final Folio folio;
     private final RunningModel running;
     private final MapView mapView;
+    private final SectionModel section;
+    private final Shelf shelf;
     private final ShellView view;
     private final Scene scene;
 
@@ -82,6 +91,8 @@ final class Assembly {
 
     Assembly(Outside outside, List<Path> samplePlaces) {
         this.outside = outside;
+        this.preferences = new PreferencesModel(outside.settings());
+        this.shell = new ShellModel(session, preferences.theme());
         this.map = new MapModel(session, outside.tasks());
         this.welcome = new WelcomeModel(
                 outside.tasks(), outside.dialogs(), outside.folders(), this::show, go -> files().whenSafe(go));
@@ -94,27 +105,34 @@ final class Assembly {
         this.hand = new DraftHand(draft);
         this.files = new DraftFiles(draft, outside.tasks(), outside.dialogs(), outside.questions());
         this.tray = new Tray(draft, hand, new LidSurfaces(draft, outside.tasks(), outside.dialogs()));
-        this.mapView = new MapView(
-                map,
-                new GroundModel(session, outside.tasks(), outside.dialogs()),
-                outside.tasks(),
-                shell.theme(),
-                hand,
-                tray);
+        GroundModel ground = new GroundModel(session, outside.tasks(), outside.dialogs());
+        this.mapView = new MapView(map, ground, outside.tasks(), shell.theme(), hand, tray);
         draft.version().addListener((version, before, after) -> mapView.repaint());
         draft.tool().addListener((tool, before, after) -> mapView.repaint());
         this.running = new RunningModel(outside.tasks()::running);
         this.folio = new Folio(session, outside.tasks(), outside.dialogs(), outside.copies(), shell.theme());
         mapView.lay(folio.plumeMap()::marks);
         folio.plumeMap().changes().addListener((changes, before, after) -> mapView.repaint());
-        Slots slots = new Slots(
-                firstPages(), new ShowingBar(map), mapView, Optional.of(folio.pages()), Optional.of(folio.ribbon()));
-        this.view = new ShellView(shell, slots, actions, running, outside.settings());
+        this.section = new SectionModel(session, outside.tasks(), draft);
+        SectionView sectionView = new SectionView(section, shell.theme());
+        this.shelf =
+                new Shelf(List.of(folio.ribbon(), new Shelf.Page("shelf.section", sectionView.bar(), sectionView)));
+        Slots slots =
+                new Slots(firstPages(), new ShowingBar(map), mapView, Optional.of(folio.pages()), Optional.of(shelf));
+        this.view = new ShellView(shell, slots, actions, running, preferences, outside.settings());
         FolderDrop.on(view, welcome, over -> session.status().set(over ? Words.of("drop.open") : ""));
         actions.add(actionsOfWindow());
         actions.add(mapView.actions());
         actions.add(new DraftActions(draft, hand, files, tray, mapView::repaint).all(map));
         actions.add(folio.actions());
+        actions.add(sectionView.actions());
+        actions.add(List.of(new Action("actions.group.section", "action.section.show", "F12", shelf::turn)));
+        session.sectionLine()
+                .addListener((line, before, after) -> after.ifPresent(drawn -> {
+                    shelf.open(1);
+                    view.showBelow();
+                }));
+        view.spreadBelow(shelf.page());
         HandoverModel handover = new HandoverModel(
                 session, outside.tasks(), outside.dialogs(), outside.copies(), outside.opener(), new PicturePng());
         HandoverPage handoverPage = new HandoverPage(handover, view::lift);
@@ -122,8 +140,15 @@ final class Assembly {
             view.lower(handoverPage);
             handoverPage.open();
         })));
-        this.scene = new Scene(view, 1280, 800);
-        Dress.put(scene, shell.theme());
+        Magnifier magnifier = new Magnifier(view, view.veil());
+        this.scene = new Scene(magnifier, 1280, 800);
+        Dress.put(scene, shell.theme(), preferences.size());
+        session.numbers().bind(preferences.numbers());
+        magnifier.factor().bind(preferences.size().map(percent -> percent / 100.0));
+        ground.cover().bind(preferences.cover().map(percent -> percent / 100.0));
+        Stream.of(preferences.rateUnit(), preferences.volumeUnit())
+                .forEach(unit -> unit.addListener(wanted -> wantUnits()));
+        wantUnits();
         welcome.look(samplePlaces);
     }
 
@@ -143,11 +168,19 @@ final class Assembly {
                 new Action(window, "action.notices", "F7", view::showNotices),
                 new Action(window, "action.running", "F10", view::showRunning),
                 new Action(window, "action.stop", "Shift+Esc", running::canStop, running::stop),
+                new Action(window, "action.preferences", "Shortcut+Comma", view::showPreferences),
+                new Action(window, "action.larger", "Shortcut+Equals", () -> preferences.resize(1)),
+                new Action(window, "action.smaller", "Shortcut+Minus", () -> preferences.resize(-1)),
                 new Action(window, "action.again", "Shortcut+R", this::again),
                 new Action(time, "action.later", "Period", () -> shell.move(1)),
                 new Action(time, "action.earlier", "Comma", () -> shell.move(-1)),
                 new Action(time, "action.deeper", "Page Down", () -> shell.sink(1)),
                 new Action(time, "action.higher", "Page Up", () -> shell.sink(-1)));
+    }
+
+    private void wantUnits() {
+        folio.reading()
+                .want(preferences.rateUnit().get(), preferences.volumeUnit().get());
     }
 
     /** One behind the other; what is behind is hidden from the keyboard too. */
@@ -223,6 +256,14 @@ final class Assembly {
                 aquifer.times().intervals());
     }
 
+    ShellView view() {
+        return view;
+    }
+
+    PreferencesModel preferences() {
+        return preferences;
+    }
+
     Scene scene() {
         return scene;
     }
@@ -245,6 +286,14 @@ final class Assembly {
 
     DraftModel draft() {
         return draft;
+    }
+
+    SectionModel section() {
+        return section;
+    }
+
+    Shelf shelf() {
+        return shelf;
     }
 
     MapModel map() {

@@ -12,6 +12,8 @@ import org.seepledger.desktop.platform.PreferredSettings;
 import org.seepledger.desktop.platform.ScreenCopyBoard;
 import org.seepledger.desktop.platform.ScreenDialogs;
 import org.seepledger.desktop.platform.ScreenQuestions;
+import org.seepledger.desktop.platform.WindowPlace;
+import org.seepledger.desktop.port.Settings;
 import org.seepledger.desktop.task.BackgroundTasks;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.welcome.Samples;
@@ -31,14 +33,15 @@ public final class WindowApplication extends Application {
     @Override
     public void start(Stage stage) {
         Preferences kept = Preferences.userRoot().node("org/seepledger/desktop");
+        Settings settings = new PreferredSettings(kept);
         Assembly assembly = new Assembly(
                 new Assembly.Outside(
                         tasks,
-                        new ScreenDialogs(stage),
+                        new ScreenDialogs(stage, settings),
                         new ScreenQuestions(stage),
                         new ScreenCopyBoard(),
                         new PreferredFolders(kept),
-                        new PreferredSettings(kept),
+                        settings,
                         new HostOpener(getHostServices())),
                 Samples.usualPlaces());
         stage.getIcons().add(new Image(WindowApplication.class.getResourceAsStream("icon.png")));
@@ -46,6 +49,7 @@ public final class WindowApplication extends Application {
         stage.setMinWidth(LEAST_WIDTH);
         stage.setMinHeight(LEAST_HEIGHT);
         stage.setScene(assembly.scene());
+        new WindowPlace(settings).follow(stage);
         stage.setOnCloseRequest(request -> {
             request.consume();
             assembly.files().whenSafe(stage::hide);

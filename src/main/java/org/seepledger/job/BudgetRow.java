@@ -82,6 +82,26 @@ record BudgetRow(Prism prism, Period period, Item item, List<Integer> accounts) 
      * @throws UsageFault if there is none or more than one; tells the nearest
      */
     static BudgetRow of(String name, Aquifer aquifer, List<Prism> prisms, List<Period> periods) {
+        boolean storageKnown = aquifer.storageKnowledge() != StorageKnowledge.UNKNOWN;
+        return of(name, prism -> Trace.accounts(aquifer, prism), storageKnown, prisms, periods);
+    }
+
+    /**
+     * {@return the row of a name, in a budget of whatever}
+     *
+     * @param name the name
+     * @param accountsOf the accounts of a prism, in the order of rows
+     * @param storageKnown whether change in storage can be given
+     * @param prisms the prisms
+     * @param periods the periods
+     * @throws UsageFault if there is none or more than one; tells the nearest
+     */
+    static BudgetRow of(
+            String name,
+            Function<Prism, List<Account>> accountsOf,
+            boolean storageKnown,
+            List<Prism> prisms,
+            List<Period> periods) {
         List<Rest<Prism>> ofPrism = after(name, prisms, Prism::name);
         if (ofPrism.isEmpty()) {
             throw none(name, "prism", name, prisms.stream().map(Prism::name).toList());
@@ -94,8 +114,8 @@ record BudgetRow(Prism prism, Period period, Item item, List<Integer> accounts) 
                 List<String> names = periods.stream().map(Period::name).toList();
                 fault = none(name, "period", prism.text(), names);
             }
-            List<Account> accounts = Trace.accounts(aquifer, prism.named());
-            Map<Item, List<Integer>> items = items(accounts, aquifer.storageKnowledge() != StorageKnowledge.UNKNOWN);
+            List<Account> accounts = accountsOf.apply(prism.named());
+            Map<Item, List<Integer>> items = items(accounts, storageKnown);
             for (Rest<Period> period : ofPeriod) {
                 List<Item> matching = matching(period.text(), items.keySet());
                 matching.forEach(

@@ -38,7 +38,7 @@ public final class InspectJob {
      */
     public static String run(Path folder, int threads, Progress progress) {
         try (AquiferFolder opened = AquiferReader.open(folder)) {
-            return text(opened, threads, progress);
+            return of(opened, threads, progress).text();
         }
     }
 
@@ -48,10 +48,10 @@ public final class InspectJob {
      * @param opened the set
      * @param threads how many threads may work
      * @param progress told how far the work is
-     * @return the report, lines of text
+     * @return what was found
      * @throws org.seepledger.fault.DataFault if something is wrong with its values
      */
-    static String text(AquiferFolder opened, int threads, Progress progress) {
+    static Inspection of(AquiferFolder opened, int threads, Progress progress) {
         Aquifer aquifer = opened.aquifer();
         List<ValueRange> ranges = Survey.of(aquifer, opened.quantities(), progress);
         Prism whole = whole(aquifer);
@@ -65,7 +65,7 @@ public final class InspectJob {
         warnings.addAll(words.warningsOfSet(List.of(record)));
         List<String> notes = new ArrayList<>(opened.notes());
         notes.addAll(words.remarks(WellRule.POINT));
-        return new InspectionText(opened, ranges, balance, record).write(warnings, notes);
+        return new Inspection(new InspectionText(opened, ranges, balance, record).write(warnings, notes), warnings);
     }
 
     /** The grid as a prism, from its south-western corner counter-clockwise. */

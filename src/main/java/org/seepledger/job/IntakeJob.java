@@ -53,7 +53,7 @@ public final class IntakeJob {
      * @throws org.seepledger.fault.DataFault if something is wrong with it
      * @throws UsageFault if there is no room for temporary files
      */
-    public static String check(Composition composition, int threads, Progress progress) {
+    public static Inspection check(Composition composition, int threads, Progress progress) {
         try (Scaffold scaffold = Scaffold.inTemporaryFolder()) {
             Map<String, Path> files = new LinkedHashMap<>();
             for (Copy copy : composition.copies()) {
@@ -62,7 +62,7 @@ public final class IntakeJob {
             Path description = scaffold.describe(composition.set());
             try (AquiferFolder opened = AquiferReader.open(description, files)) {
                 readPrisms(opened, files);
-                return InspectJob.text(opened, threads, progress);
+                return InspectJob.of(opened, threads, progress);
             }
         } catch (IOException e) {
             throw new UsageFault(
@@ -90,7 +90,7 @@ public final class IntakeJob {
             scaffold.describe(composition.set());
             try (AquiferFolder opened = AquiferReader.open(scaffold.folder())) {
                 readPrisms(opened, Map.of(PRISMS, scaffold.folder().resolve(PRISMS)));
-                InspectJob.text(opened, threads, progress);
+                InspectJob.of(opened, threads, progress);
             }
             scaffold.publish(absolute);
         } catch (IOException e) {

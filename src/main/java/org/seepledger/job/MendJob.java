@@ -80,7 +80,8 @@ public final class MendJob {
                 return new Finding(faults, "");
             }
             try (AquiferFolder opened = AquiferReader.open(file, folder)) {
-                return new Finding(List.of(), InspectJob.text(opened, threads, progress));
+                return new Finding(
+                        List.of(), InspectJob.of(opened, threads, progress).text());
             } catch (DataFault e) {
                 return new Finding(List.of(new Fault(e.getMessage(), draft.of(e))), "");
             }

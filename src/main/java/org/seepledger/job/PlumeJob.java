@@ -55,7 +55,7 @@ public final class PlumeJob {
         this.subject = subject;
         this.stopwatch = stopwatch;
         this.progress = progress;
-        this.units = units();
+        this.units = subject.massUnits(request.rateUnit(), request.massUnit(), request.volumeUnit());
         this.periods = subject.periods(request.every(), request.periods(), request.waterYearStart());
         this.above = request.above()
                 .map(threshold ->
@@ -80,20 +80,6 @@ public final class PlumeJob {
         try (OutputFolder out = OutputFolder.at(request.out(), "plume", request.overwrite());
                 Subject subject = Subject.open(request.aquifer(), request.prisms(), request.clip())) {
             return new PlumeJob(request, subject, stopwatch, progress).run(out);
-        }
-    }
-
-    private MassUnits units() {
-        try {
-            return MassUnits.of(
-                    subject.aquifer().lengthUnit(),
-                    subject.aquifer().timeUnit(),
-                    request.rateUnit().orElse(null),
-                    request.massUnit().orElse(null),
-                    request.volumeUnit().orElse(null));
-        } catch (IllegalArgumentException e) {
-            throw new UsageFault("The unit asked for does not fit: " + e.getMessage()
-                    + ". Give a rate as kg/yr, a mass as kg and a volume as m3.");
         }
     }
 

@@ -18,9 +18,6 @@ import org.seepledger.unit.Figures;
 /** Puts into words what the reader of a solute balance must know. */
 final class PlumeWarnings {
 
-    /** From this share of mass on, what stands for non-detects decides too much. */
-    private static final double TOO_UNDETECTED = 0.15;
-
     /** From this decay within an interval on, the mean of its two ends is too coarse. */
     private static final double TOO_FAST = 0.5;
 
@@ -75,7 +72,7 @@ final class PlumeWarnings {
             warnings.add(
                     name(plume) + ": every concentration is below its detection limit. Check the limit and its unit;"
                             + " whether any of it is there is not known.");
-        } else if (stock.undetectedShare() > TOO_UNDETECTED) {
+        } else if (stock.undetectedShare() > NonDetects.TOO_MUCH) {
             warnings.add(name(plume) + ": " + Figures.percent(100 * stock.undetectedShare())
                     + " of the mass rests on non-detects at time "
                     + Figures.shown(aquifer.times().instant(worst)) + " "

@@ -15,6 +15,7 @@ import org.seepledger.io.aquifer.AquiferReader;
 import org.seepledger.io.prisms.PrismsReader;
 import org.seepledger.io.prisms.SurfaceRasters;
 import org.seepledger.io.result.FileRecord;
+import org.seepledger.io.result.MassUnits;
 import org.seepledger.io.result.ResultUnits;
 import org.seepledger.io.result.Statement;
 import org.seepledger.io.table.PeriodsTable;
@@ -42,9 +43,8 @@ final class Subject implements AutoCloseable {
         this.surfaces = new SurfaceRasters(aquifer.grid(), notes::add);
         warnings.addAll(folder.warnings());
         notes.addAll(folder.notes());
-        int layers = aquifer.layers().size();
-        PrismsReader reader =
-                new PrismsReader(folder.crs(), aquifer.grid(), layers, clip, surfaces, warnings::add, notes::add);
+        PrismsReader reader = new PrismsReader(
+                folder.crs(), aquifer.grid(), aquifer.layers(), clip, surfaces, warnings::add, notes::add);
         try {
             this.prisms = reader.read(prismsFile, prismsFile.toString());
         } catch (RuntimeException e) {
@@ -124,6 +124,21 @@ final class Subject implements AutoCloseable {
         } catch (IllegalArgumentException e) {
             throw new UsageFault(
                     "The unit asked for does not fit: " + e.getMessage() + ". Give a rate as m3/d and a volume as m3.");
+        }
+    }
+
+    /** The units of results about solutes. */
+    MassUnits massUnits(Optional<Measure> rate, Optional<Measure> mass, Optional<Measure> volume) {
+        try {
+            return MassUnits.of(
+                    aquifer().lengthUnit(),
+                    aquifer().timeUnit(),
+                    rate.orElse(null),
+                    mass.orElse(null),
+                    volume.orElse(null));
+        } catch (IllegalArgumentException e) {
+            throw new UsageFault("The unit asked for does not fit: " + e.getMessage()
+                    + ". Give a rate as kg/yr, a mass as kg and a volume as m3.");
         }
     }
 

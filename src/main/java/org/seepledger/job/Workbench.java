@@ -29,6 +29,12 @@ import org.seepledger.io.result.Provenance;
 import org.seepledger.io.result.ResultUnits;
 import org.seepledger.ledger.Period;
 import org.seepledger.ledger.PeriodBudget;
+import org.seepledger.picture.Body;
+import org.seepledger.picture.NearbyWell;
+import org.seepledger.picture.Picture;
+import org.seepledger.picture.Profile;
+import org.seepledger.picture.Section;
+import org.seepledger.picture.SectionLine;
 import org.seepledger.prism.Prism;
 import org.seepledger.progress.Cancelled;
 import org.seepledger.progress.Progress;
@@ -227,8 +233,7 @@ public final class Workbench implements AutoCloseable {
     }
 
     private PrismsReader reader(Consumer<String> notes) {
-        int layers = aquifer().layers().size();
-        return new PrismsReader(folder.crs(), aquifer().grid(), layers, true, surfaces, notes, notes);
+        return new PrismsReader(folder.crs(), aquifer().grid(), aquifer().layers(), true, surfaces, notes, notes);
     }
 
     /**
@@ -384,6 +389,18 @@ public final class Workbench implements AutoCloseable {
     }
 
     /**
+     * {@return a map on paper of what a view shows}
+     *
+     * @param asked what it is to show
+     * @param progress told how far the work is
+     * @throws org.seepledger.fault.DataFault if the data are wrong, or the selected prism has no budget
+     * @throws Cancelled if the work was stopped
+     */
+    public Picture map(MapAsked asked, Progress progress) {
+        return new MapOnPaper(this, asked, progress).drawn();
+    }
+
+    /**
      * Reads horizontal flux for arrows on a map.
      *
      * @param layer the layer, from 0
@@ -408,6 +425,55 @@ public final class Workbench implements AutoCloseable {
      */
     public List<WellPlace> wells(int interval) {
         return WellPlace.of(aquifer(), interval);
+    }
+
+    /**
+     * Cuts the aquifer along a line.
+     *
+     * @param line the line
+     * @param quantity one of {@link #quantities()}, to be shown as colour; empty for none
+     * @param interval the interval, from 0, whose begin and end water levels are those of
+     * @param progress told how far the reading is
+     * @return what stands along it; nothing where it lies off the grid
+     * @throws org.seepledger.fault.DataFault if the data are wrong
+     * @throws Cancelled if the work was stopped
+     */
+    public Profile profile(SectionLine line, Optional<MapQuantity> quantity, int interval, Progress progress) {
+        Optional<Profile.LayerValues> values =
+                quantity.map(shown -> (layer, window) -> new CellReading(aquifer(), interval, layer, window).of(shown));
+        return gate.ask(progress, until -> Profile.along(line, aquifer(), interval, interval + 1, values, until));
+    }
+
+    /**
+     * Puts prisms and wells into a section; quick, so that it follows prisms while they are drawn.
+     *
+     * @param profile what stands along its line
+     * @param prisms the prisms as they are drawn, even beyond the grid
+     * @param within how far from the line wells are shown, in length units
+     * @param progress told how far the work is
+     * @return the section, without colours, and with nothing standing out
+     * @throws org.seepledger.fault.DataFault if a prism's surface cannot be read
+     * @throws Cancelled if the work was stopped
+     */
+    public Section section(Profile profile, List<Prism> prisms, double within, Progress progress) {
+        return gate.ask(progress, until -> {
+            List<Body> bodies = new ArrayList<>();
+            for (Prism prism : prisms) {
+                until.step();
+                bodies.add(Body.of(prism, profile));
+            }
+            boolean moves = aquifer().head().filter(GriddedValues::changes).isPresent();
+            return new Section(
+                    profile,
+                    aquifer().layers(),
+                    aquifer().lengthUnit().toString(),
+                    moves ? Optional.of("interval") : Optional.empty(),
+                    bodies,
+                    NearbyWell.of(aquifer(), profile, within),
+                    within,
+                    Optional.empty(),
+                    Section.Light.NONE);
+        });
     }
 
     static int threads() {

@@ -1,5 +1,7 @@
 package org.seepledger.picture;
 
+import java.util.Locale;
+
 /**
  * A colour by what it is for, so that page and window can give it in light and dark; or, with {@link Rgb}, one that is
  * the same in both, as a ramp's.
@@ -51,7 +53,7 @@ public sealed interface Ink permits Ink.Token, Ink.Rgb {
         /** {@return as {@code #rrggbb}} */
         @Override
         public String toString() {
-            return String.format("#%06x", value);
+            return String.format(Locale.ROOT, "#%06x", value);
         }
     }
 }

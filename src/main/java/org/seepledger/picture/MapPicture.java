@@ -5,6 +5,7 @@ import java.util.DoubleSummaryStatistics;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.ToDoubleFunction;
+import java.util.stream.DoubleStream;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.balance.HotSpot;
 import org.seepledger.ledger.PeriodBudget;
@@ -48,14 +49,23 @@ public final class MapPicture {
             Drape values, ValueScale scale, String quantity, String unit, String layer, boolean contoured) {}
 
     private MapPicture(Aquifer aquifer, Prism subject, List<Prism> others, Optional<Ground> ground, double width) {
+        this(aquifer, frame(subject, width), Optional.of(subject), others, ground, width);
+    }
+
+    private MapPicture(
+            Aquifer aquifer,
+            MapFrame frame,
+            Optional<Prism> subject,
+            List<Prism> others,
+            Optional<Ground> ground,
+            double width) {
         this.aquifer = aquifer;
-        MapFrame frame = frame(subject, width);
         this.width = width;
         this.height = frame.box().bottom() + MapSheet.MARGIN + STRIP;
         this.sheet = new MapSheet(frame);
         ground.ifPresent(this::lay);
         others.forEach(other -> sheet.prism(other, false));
-        sheet.prism(subject, true);
+        subject.ifPresent(prism -> sheet.prism(prism, true));
     }
 
     /**
@@ -78,6 +88,21 @@ public final class MapPicture {
                 y.getMin() - margin,
                 x.getMax() + margin,
                 y.getMax() + margin);
+    }
+
+    /**
+     * {@return where map coordinates come to in a map of what a view shows}
+     *
+     * @param west the least map x that is seen
+     * @param south the least map y
+     * @param east the greatest map x
+     * @param north the greatest map y
+     * @param width of the map, in logical pixels
+     */
+    public static MapFrame frame(double west, double south, double east, double north, double width) {
+        double room = width - MapSheet.MARGIN - RIGHT;
+        double height = Math.max(LOWEST, Math.min(HIGHEST, room * (north - south) / (east - west)));
+        return MapFrame.fitting(new Box(MapSheet.MARGIN, TOP, room, height), west, south, east, north);
     }
 
     private static DoubleSummaryStatistics coordinates(Prism prism, ToDoubleFunction<Side> coordinate) {
@@ -122,11 +147,54 @@ public final class MapPicture {
         new FaceArrows(subject, budget, unit).draw(map.sheet);
         aquifer.placedWells().forEach(map.sheet::well);
         others.forEach(map.sheet::name);
-        return map.picture(
-                ground,
-                "Map of " + subject.name() + " with the flow through its faces",
-                "Arrows across the faces point inward where water comes in and outward where it leaves; their widths"
-                        + " are in proportion to net flow in " + unit.words() + ".");
+        return map.picture(ground, "Map of " + subject.name() + " with the flow through its faces", arrowsMean(unit));
+    }
+
+    /**
+     * The flow through the faces of a prism.
+     *
+     * @param budget the prism's budget
+     * @param unit the unit to show
+     */
+    public record Flows(PeriodBudget budget, UnitShown unit) {}
+
+    /**
+     * {@return a map of what a view shows}
+     *
+     * @param aquifer the aquifer
+     * @param frame the part of the map
+     * @param subject the selected prism, if there is one
+     * @param others the other prisms
+     * @param ground what lies under them
+     * @param flows the flow through the selected prism's faces, if it is shown
+     * @param wells whether wells are shown
+     * @param title what it shows
+     * @param width in logical pixels
+     */
+    public static Picture ofView(
+            Aquifer aquifer,
+            MapFrame frame,
+            Optional<Prism> subject,
+            List<Prism> others,
+            Ground ground,
+            Optional<Flows> flows,
+            boolean wells,
+            String title,
+            double width) {
+        MapPicture map = new MapPicture(aquifer, frame, subject, others, Optional.of(ground), width);
+        flows.ifPresent(shown -> new FaceArrows(subject.orElseThrow(), shown.budget(), shown.unit()).draw(map.sheet));
+        if (wells) {
+            aquifer.placedWells().forEach(map.sheet::well);
+        }
+        others.forEach(map.sheet::name);
+        String description =
+                flows.map(shown -> arrowsMean(shown.unit())).orElse("Prisms are outlined; the selected one in full.");
+        return map.picture(Optional.of(ground), title, description);
+    }
+
+    private static String arrowsMean(UnitShown unit) {
+        return "Arrows across the faces point inward where water comes in and outward where it leaves; their widths"
+                + " are in proportion to net flow in " + unit.words() + ".";
     }
 
     /**
@@ -214,11 +282,13 @@ public final class MapPicture {
 
     private void drawLine(SectionLine line) {
         MapFrame frame = sheet.frame();
-        double[] xy = {frame.x(line.fromX()), frame.y(line.fromY()), frame.x(line.toX()), frame.y(line.toY())};
+        double[] xy = line.places().stream()
+                .flatMapToDouble(place -> DoubleStream.of(frame.x(place.x()), frame.y(place.y())))
+                .toArray();
         sheet.above(new Mark.Line(xy, Stroke.of(Ink.Token.TEXT, 1).dashed(9.0, 3.0, 2.0, 3.0)));
         List<Mark> ends = new ArrayList<>();
         sheet.labels().place(List.of(end(xy[0], xy[1], "A")), ends);
-        sheet.labels().place(List.of(end(xy[2], xy[3], "A′")), ends);
+        sheet.labels().place(List.of(end(xy[xy.length - 2], xy[xy.length - 1], "A′")), ends);
         ends.forEach(sheet::above);
     }
 

@@ -2,12 +2,22 @@ package org.seepledger.picture;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.function.UnaryOperator;
 
 /**
  * What a picture is made of. Places are in logical pixels from the picture's upper left corner, x to the right and y down;
  * later marks cover earlier ones.
  */
 public sealed interface Mark permits Mark.Line, Mark.Area, Mark.Text, Mark.Image, Mark.Group {
+
+    /**
+     * {@return the same with its letters written otherwise, where it has any}
+     *
+     * @param form turns words into what is written
+     */
+    default Mark written(UnaryOperator<String> form) {
+        return this;
+    }
 
     /**
      * How a line is drawn.
@@ -154,6 +164,11 @@ public sealed interface Mark permits Mark.Line, Mark.Area, Mark.Text, Mark.Image
             double angle)
             implements Mark {
 
+        @Override
+        public Text written(UnaryOperator<String> form) {
+            return new Text(x, y, form.apply(words), size, anchor, ink, bold, halo, angle);
+        }
+
         /**
          * {@return a level text of the usual colour}
          *
@@ -222,6 +237,12 @@ public sealed interface Mark permits Mark.Line, Mark.Area, Mark.Text, Mark.Image
      * @param marks the marks
      */
     record Group(Box clip, List<Mark> marks) implements Mark {
+
+        @Override
+        public Group written(UnaryOperator<String> form) {
+            return new Group(
+                    clip, marks.stream().map(mark -> mark.written(form)).toList());
+        }
 
         /** Copies the list. */
         public Group {

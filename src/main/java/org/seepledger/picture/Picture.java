@@ -1,6 +1,7 @@
 package org.seepledger.picture;
 
 import java.util.List;
+import java.util.function.UnaryOperator;
 
 /**
  * A picture as marks.
@@ -16,5 +17,19 @@ public record Picture(double width, double height, String title, String descript
     /** Copies the list. */
     public Picture {
         marks = List.copyOf(marks);
+    }
+
+    /**
+     * {@return the same with its letters written otherwise}
+     *
+     * @param form turns words into what is written
+     */
+    public Picture written(UnaryOperator<String> form) {
+        return new Picture(
+                width,
+                height,
+                title,
+                description,
+                marks.stream().map(mark -> mark.written(form)).toList());
     }
 }

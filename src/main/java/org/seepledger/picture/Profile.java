@@ -1,151 +1,214 @@
 package org.seepledger.picture;
 
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.TreeSet;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.Axis;
 import org.seepledger.aquifer.Grid;
-import org.seepledger.aquifer.GriddedValues;
 import org.seepledger.aquifer.Window;
-import org.seepledger.prism.Prism;
-import org.seepledger.prism.Ring;
-import org.seepledger.prism.Side;
-import org.seepledger.prism.VerticalRange;
+import org.seepledger.progress.Progress;
 
 /**
- * An aquifer and a prism cut along a line: stretches that each lie in one cell, and wholly inside or outside the prism.
+ * An aquifer cut along a line: stretches that each lie in one cell. What lies off the grid has none.
  *
+ * <p>A leg on a line between cells takes those to the east or north of it, on the grid's own edge those that there are.
+ * Only the cells that the line crosses are read, in small windows, and each once.
+ *
+ * @param line the line
+ * @param planUnit how many length units a plan unit has
  * @param stretches from the line's beginning to its end
  */
-record Profile(List<Stretch> stretches) {
+public record Profile(SectionLine line, double planUnit, List<Stretch> stretches) {
 
-    /** More stretches than a picture has pixels are not looked at. */
-    private static final int MOST = 2000;
+    /** More stretches than could be told apart, however far one zooms in, are sampled. */
+    private static final int MOST = 20_000;
+
+    /** A window around cells of the line may hold as many cells: few calls, and little read in vain. */
+    private static final int CELLS_AT_ONCE = 64;
 
     /** Copies the list. */
-    Profile {
+    public Profile {
         stretches = List.copyOf(stretches);
+    }
+
+    /** Gives values to be shown as colour. */
+    @FunctionalInterface
+    public interface LayerValues {
+
+        /**
+         * {@return the values of a window's cells in a layer, row-major; NaN where there is none}
+         *
+         * @param layer the layer, from 0
+         * @param window the window
+         */
+        double[] of(int layer, Window window);
     }
 
     /**
      * What stands in a column of cells.
      *
+     * @param row its row in the grid
+     * @param column its column in the grid
      * @param surfaces elevations between the layers, from the uppermost top down; NaN where there is none
-     * @param levelAtStart the uppermost layer's head at the record's begin; NaN where there is none
-     * @param levelAtEnd the same at its end
+     * @param before each layer's head at the begin; negative infinity where dry, NaN where there is none
+     * @param heads each layer's head at the end
+     * @param values each layer's value to be shown; empty where none was asked for
      */
-    record Column(double[] surfaces, double levelAtStart, double levelAtEnd) {}
+    public record Column(int row, int column, double[] surfaces, double[] before, double[] heads, double[] values) {
+
+        /** The head of the uppermost layer that has one and is not dry. */
+        private static double level(double[] heads) {
+            for (double head : heads) {
+                if (Double.isFinite(head)) {
+                    return head;
+                }
+            }
+            return Double.NaN;
+        }
+
+        /** {@return the uppermost water level at the begin; NaN where there is none} */
+        double levelBefore() {
+            return level(before);
+        }
+
+        /** {@return the uppermost water level at the end; NaN where there is none} */
+        double level() {
+            return level(heads);
+        }
+
+        /**
+         * {@return the layer that an elevation lies in, from 0; −1 for none}
+         *
+         * @param elevation in length units
+         */
+        public int layerAt(double elevation) {
+            for (int layer = 0; layer + 1 < surfaces.length; layer++) {
+                if (elevation <= surfaces[layer] && elevation > surfaces[layer + 1]) {
+                    return layer;
+                }
+            }
+            return -1;
+        }
+    }
 
     /**
      * A piece of the line.
      *
-     * @param from where it begins, as a share of the line
+     * @param from how far along the line it begins, in length units
      * @param to where it ends
      * @param column what it cuts
-     * @param top the elevation of the prism's top; NaN outside the prism
-     * @param bottom the elevation of its bottom
      */
-    record Stretch(double from, double to, Column column, double top, double bottom) {
+    public record Stretch(double from, double to, Column column) {}
 
-        boolean isInPrism() {
-            return top > bottom;
-        }
+    /** {@return how long the line is, in length units} */
+    public double length() {
+        return line.length() * planUnit;
     }
 
     /**
-     * {@return the cut}
+     * {@return the stretch at a distance along the line, if the line lies on the grid there}
      *
-     * @param line the line, on the grid
-     * @param aquifer the aquifer
-     * @param prism the prism
+     * @param along in length units
      */
-    static Profile along(SectionLine line, Aquifer aquifer, Prism prism) {
+    public Optional<Stretch> at(double along) {
+        return stretches.stream()
+                .filter(stretch -> along >= stretch.from() && along <= stretch.to())
+                .findFirst();
+    }
+
+    /**
+     * Cuts an aquifer.
+     *
+     * @param line the line
+     * @param aquifer the aquifer
+     * @param begin the instant that water levels begin at, from 0
+     * @param end the instant that they end at
+     * @param values values to be shown as colour, if any
+     * @param progress asked before each window is read
+     * @return the cut
+     * @throws org.seepledger.fault.DataFault if the data are wrong
+     */
+    public static Profile along(
+            SectionLine line, Aquifer aquifer, int begin, int end, Optional<LayerValues> values, Progress progress) {
         Grid grid = aquifer.grid();
-        List<Stretch> stretches = new ArrayList<>();
-        Window lastCell = null;
-        Column column = null;
-        double from = 0;
-        for (double to : ends(line, grid, prism)) {
-            double x = line.x((from + to) / 2);
-            double y = line.y((from + to) / 2);
-            int row = grid.flipped(grid.y().nearest(grid.localY(x, y)));
-            Window cell = new Window(row, grid.x().nearest(grid.localX(x, y)), 1, 1);
-            if (!cell.equals(lastCell)) {
-                column = column(aquifer, cell);
-                lastCell = cell;
+        List<Cell> cells = new ArrayList<>();
+        for (SectionLine.Leg leg : line.legs()) {
+            addCells(leg, grid, cells);
+        }
+        Map<Long, Column> columns = new HashMap<>();
+        ColumnReading reading = new ColumnReading(aquifer, begin, end, values);
+        for (int first = 0; first < cells.size(); ) {
+            progress.step();
+            Window window = cells.get(first).window();
+            int next = first + 1;
+            while (next < cells.size()
+                    && joined(window, cells.get(next).window()).size() <= CELLS_AT_ONCE) {
+                window = joined(window, cells.get(next).window());
+                next++;
             }
-            boolean inside = isInside(prism, x, y);
-            double top = inside ? top(prism.range(), column, cell) : Double.NaN;
-            double bottom = inside ? bottom(prism.range(), column, cell) : Double.NaN;
-            stretches.add(new Stretch(from, to, column, top, bottom));
+            for (Cell cell : cells.subList(first, next)) {
+                Window read = window;
+                columns.computeIfAbsent(cell.key(), key -> reading.of(read, cell.row(), cell.column()));
+            }
+            first = next;
+        }
+        double unit = grid.planUnit();
+        return new Profile(
+                line,
+                unit,
+                cells.stream()
+                        .map(cell -> new Stretch(unit * cell.from(), unit * cell.to(), columns.get(cell.key())))
+                        .toList());
+    }
+
+    /** A piece of the line in a cell; distances in plan units. */
+    private record Cell(double from, double to, int row, int column) {
+
+        Window window() {
+            return new Window(row, column, 1, 1);
+        }
+
+        long key() {
+            return (long) row << 32 | column;
+        }
+    }
+
+    private static Window joined(Window one, Window other) {
+        int row = Math.min(one.row(), other.row());
+        int column = Math.min(one.column(), other.column());
+        int rowEnd = Math.max(one.rowEnd(), other.rowEnd());
+        int columnEnd = Math.max(one.columnEnd(), other.columnEnd());
+        return new Window(row, column, rowEnd - row, columnEnd - column);
+    }
+
+    private static void addCells(SectionLine.Leg leg, Grid grid, List<Cell> cells) {
+        double from = 0;
+        for (double to : ends(leg, grid)) {
+            var middle = leg.at((from + to) / 2);
+            if (grid.holds(middle.x(), middle.y())) {
+                int column = grid.x().nearest(grid.snappedX(middle.x(), middle.y()));
+                int row = grid.flipped(grid.y().nearest(grid.snappedY(middle.x(), middle.y())));
+                cells.add(new Cell(leg.begin() + from * leg.length(), leg.begin() + to * leg.length(), row, column));
+            }
             from = to;
         }
-        return new Profile(stretches);
     }
 
-    private static double top(VerticalRange range, Column column, Window cell) {
-        if (range instanceof VerticalRange.Layers layers) {
-            return column.surfaces()[layers.first()];
-        }
-        Optional<GriddedValues> top = ((VerticalRange.Elevations) range).top();
-        return Math.min(
-                top.map(surface -> read(surface, 0, 0, cell)).orElse(Double.POSITIVE_INFINITY), column.surfaces()[0]);
-    }
-
-    private static double bottom(VerticalRange range, Column column, Window cell) {
-        if (range instanceof VerticalRange.Layers layers) {
-            return column.surfaces()[layers.last() + 1];
-        }
-        Optional<GriddedValues> bottom = ((VerticalRange.Elevations) range).bottom();
-        double lowest = column.surfaces()[column.surfaces().length - 1];
-        return Math.max(bottom.map(surface -> read(surface, 0, 0, cell)).orElse(Double.NEGATIVE_INFINITY), lowest);
-    }
-
-    private static Column column(Aquifer aquifer, Window cell) {
-        double[] surfaces = new double[aquifer.layers().size() + 1];
-        for (int k = 0; k < surfaces.length; k++) {
-            surfaces[k] = read(aquifer.surface(k), Math.max(0, k - 1), 0, cell);
-        }
-        int end = aquifer.times().intervals();
-        return new Column(surfaces, level(aquifer, 0, cell), level(aquifer, end, cell));
-    }
-
-    /** The head of the uppermost layer that has one and is not dry. */
-    private static double level(Aquifer aquifer, int instant, Window cell) {
-        for (int layer = 0; layer < aquifer.layers().size() && aquifer.head().isPresent(); layer++) {
-            GriddedValues head = aquifer.head().get();
-            double level = read(head, layer, head.changes() ? instant : 0, cell);
-            if (Double.isFinite(level)) {
-                return level;
-            }
-        }
-        return Double.NaN;
-    }
-
-    private static double read(GriddedValues values, int layer, int step, Window cell) {
-        double[] target = new double[1];
-        values.read(layer, step, cell, target, 0);
-        return target[0];
-    }
-
-    /** Where stretches end: at grid lines, at the prism's sides, and at the end of the line. */
-    private static Iterable<Double> ends(SectionLine line, Grid grid, Prism prism) {
+    /** Where pieces of a leg end, as shares of it: at grid lines, and at its end. */
+    private static Iterable<Double> ends(SectionLine.Leg leg, Grid grid) {
         TreeSet<Double> ends = new TreeSet<>();
-        double startX = grid.localX(line.fromX(), line.fromY());
-        double startY = grid.localY(line.fromX(), line.fromY());
-        addLines(ends, grid.x(), startX, grid.localX(line.toX(), line.toY()) - startX);
-        addLines(ends, grid.y(), startY, grid.localY(line.toX(), line.toY()) - startY);
+        double startX = grid.localX(leg.from().x(), leg.from().y());
+        double startY = grid.localY(leg.from().x(), leg.from().y());
+        addLines(ends, grid.x(), startX, grid.localX(leg.to().x(), leg.to().y()) - startX);
+        addLines(ends, grid.y(), startY, grid.localY(leg.to().x(), leg.to().y()) - startY);
         if (ends.size() > MOST) {
             ends.clear();
             for (int i = 1; i < MOST; i++) {
                 ends.add((double) i / MOST);
-            }
-        }
-        for (Ring ring : prism.rings()) {
-            for (int i = 0; i < ring.sides().size(); i++) {
-                addCrossing(ends, line, ring.sides().get(i), ring.after(i));
             }
         }
         ends.add(1.0);
@@ -154,40 +217,10 @@ record Profile(List<Stretch> stretches) {
 
     private static void addLines(TreeSet<Double> ends, Axis axis, double start, double way) {
         for (int i = 0; i <= axis.count(); i++) {
-            addInside(ends, (axis.edge(i) - start) / way);
-        }
-    }
-
-    private static void addCrossing(TreeSet<Double> ends, SectionLine line, Side from, Side to) {
-        double wayX = line.toX() - line.fromX();
-        double wayY = line.toY() - line.fromY();
-        double before = wayX * (from.y() - line.fromY()) - wayY * (from.x() - line.fromX());
-        double after = wayX * (to.y() - line.fromY()) - wayY * (to.x() - line.fromX());
-        if (before > 0 != after > 0) {
-            double part = before / (before - after);
-            double x = from.x() + part * (to.x() - from.x()) - line.fromX();
-            double y = from.y() + part * (to.y() - from.y()) - line.fromY();
-            addInside(ends, (x * wayX + y * wayY) / (wayX * wayX + wayY * wayY));
-        }
-    }
-
-    private static void addInside(TreeSet<Double> ends, double share) {
-        if (share > 0 && share < 1) {
-            ends.add(share);
-        }
-    }
-
-    /** Whether a ray to the east crosses the rings an odd number of times. */
-    private static boolean isInside(Prism prism, double x, double y) {
-        boolean inside = false;
-        for (Ring ring : prism.rings()) {
-            for (int i = 0; i < ring.sides().size(); i++) {
-                Side from = ring.sides().get(i);
-                Side to = ring.after(i);
-                boolean spans = from.y() > y != to.y() > y;
-                inside ^= spans && x < from.x() + (y - from.y()) / (to.y() - from.y()) * (to.x() - from.x());
+            double share = (axis.edge(i) - start) / way;
+            if (share > 0 && share < 1) {
+                ends.add(share);
             }
         }
-        return inside;
     }
 }

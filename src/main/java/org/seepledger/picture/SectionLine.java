@@ -1,6 +1,9 @@
 package org.seepledger.picture;
 
+import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.Collections;
+import java.util.List;
 import org.locationtech.jts.algorithm.InteriorPoint;
 import org.locationtech.jts.algorithm.MinimumDiameter;
 import org.locationtech.jts.geom.Coordinate;
@@ -10,22 +13,61 @@ import org.locationtech.jts.geom.Polygon;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.prism.Prism;
 import org.seepledger.prism.Ring;
+import org.seepledger.sketch.Place;
+import org.seepledger.sketch.Refusal;
 
 /**
- * The straight line that a vertical section follows.
+ * The line that a vertical section follows: one leg or several, from A to A′. Distances along it are in plan units.
  *
- * @param fromX the map x of its beginning
- * @param fromY the map y of its beginning
- * @param toX the map x of its end
- * @param toY the map y of its end
+ * @param places where it begins, bends and ends, none the same as the one before
  */
-public record SectionLine(double fromX, double fromY, double toX, double toY) {
+public record SectionLine(List<Place> places) {
 
     private static final double BEYOND = 0.12;
     private static final GeometryFactory FACTORY = new GeometryFactory();
 
     /**
-     * {@return the line along the longer side of the smallest rectangle round a prism's first part, through a place inside
+     * Drops places that repeat the one before.
+     *
+     * @throws Refusal if fewer than two are left
+     */
+    public SectionLine {
+        List<Place> kept = new ArrayList<>();
+        for (Place place : places) {
+            if (kept.isEmpty() || !kept.get(kept.size() - 1).equals(place)) {
+                kept.add(place);
+            }
+        }
+        if (kept.size() < 2) {
+            throw new Refusal("A section line begins at one place and ends at another.");
+        }
+        places = List.copyOf(kept);
+    }
+
+    /**
+     * A straight part of the line.
+     *
+     * @param begin how far along the line it begins
+     * @param from where it begins
+     * @param to where it ends
+     */
+    record Leg(double begin, Place from, Place to) {
+
+        double length() {
+            return from.distance(to);
+        }
+
+        Place at(double share) {
+            return new Place(from.x() + share * (to.x() - from.x()), from.y() + share * (to.y() - from.y()));
+        }
+
+        double nearest(Place place) {
+            return begin + from.distance(place.nearestOn(from, to));
+        }
+    }
+
+    /**
+     * {@return the straight line along the longer side of the smallest rectangle round a prism's first part, through a place inside
      * it, from west to east, a little beyond the prism as far as the grid reaches}
      *
      * @param prism the prism
@@ -48,12 +90,9 @@ public record SectionLine(double fromX, double fromY, double toX, double toY) {
             greatest = Math.max(greatest, along);
         }
         double more = BEYOND * (greatest - least);
-        return new SectionLine(
-                        inside.x + (least - more) * alongX,
-                        inside.y + (least - more) * alongY,
-                        inside.x + (greatest + more) * alongX,
-                        inside.y + (greatest + more) * alongY)
-                .within(grid);
+        Place from = new Place(inside.x + (least - more) * alongX, inside.y + (least - more) * alongY);
+        Place to = new Place(inside.x + (greatest + more) * alongX, inside.y + (greatest + more) * alongY);
+        return within(grid, new Leg(0, from, to));
     }
 
     private static Polygon polygon(Prism prism) {
@@ -72,29 +111,74 @@ public record SectionLine(double fromX, double fromY, double toX, double toY) {
         return FACTORY.createLinearRing(closed);
     }
 
-    /** {@return the map x at a share of the way, from 0 to 1} */
-    double x(double share) {
-        return fromX + share * (toX - fromX);
+    /** {@return how long it is} */
+    public double length() {
+        return legs().stream().mapToDouble(Leg::length).sum();
     }
 
-    /** {@return the map y at a share of the way, from 0 to 1} */
-    double y(double share) {
-        return fromY + share * (toY - fromY);
+    /**
+     * {@return a place on it; its ends beyond them}
+     *
+     * @param along how far along the line
+     */
+    public Place at(double along) {
+        Leg leg = legs().get(0);
+        for (Leg next : legs()) {
+            leg = next.begin() <= along ? next : leg;
+        }
+        return leg.at(Math.max(0, Math.min(1, (along - leg.begin()) / leg.length())));
     }
 
-    /** {@return how long it is, in plan units} */
-    double length() {
-        return Math.hypot(toX - fromX, toY - fromY);
+    /**
+     * {@return how far along the line a place is nearest to it}
+     *
+     * @param place the place
+     */
+    public double nearest(Place place) {
+        double nearest = 0;
+        for (Leg leg : legs()) {
+            double along = leg.nearest(place);
+            nearest = at(along).distance(place) < at(nearest).distance(place) ? along : nearest;
+        }
+        return nearest;
     }
 
-    /** The part of the line that lies on the grid. */
-    private SectionLine within(Grid grid) {
+    /** {@return the same line from its end to its beginning} */
+    public SectionLine turned() {
+        List<Place> back = new ArrayList<>(places);
+        Collections.reverse(back);
+        return new SectionLine(back);
+    }
+
+    List<Leg> legs() {
+        List<Leg> legs = new ArrayList<>();
+        double begin = 0;
+        for (int i = 0; i + 1 < places.size(); i++) {
+            Leg leg = new Leg(begin, places.get(i), places.get(i + 1));
+            legs.add(leg);
+            begin += leg.length();
+        }
+        return legs;
+    }
+
+    /** The part of a leg that lies on the grid; all of it where none does. */
+    private static SectionLine within(Grid grid, Leg leg) {
         double[] span = {0, 1};
-        double startX = grid.localX(fromX, fromY);
-        double startY = grid.localY(fromX, fromY);
-        clip(span, startX, grid.localX(toX, toY) - startX, grid.x().edge(grid.columns()));
-        clip(span, startY, grid.localY(toX, toY) - startY, grid.y().edge(grid.rows()));
-        return new SectionLine(x(span[0]), y(span[0]), x(span[1]), y(span[1]));
+        double startX = grid.localX(leg.from().x(), leg.from().y());
+        double startY = grid.localY(leg.from().x(), leg.from().y());
+        clip(
+                span,
+                startX,
+                grid.localX(leg.to().x(), leg.to().y()) - startX,
+                grid.x().edge(grid.columns()));
+        clip(
+                span,
+                startY,
+                grid.localY(leg.to().x(), leg.to().y()) - startY,
+                grid.y().edge(grid.rows()));
+        return span[0] < span[1]
+                ? new SectionLine(List.of(leg.at(span[0]), leg.at(span[1])))
+                : new SectionLine(List.of(leg.from(), leg.to()));
     }
 
     private static void clip(double[] span, double start, double way, double end) {

@@ -4,20 +4,20 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import org.seepledger.aquifer.Aquifer;
-import org.seepledger.aquifer.Grid;
-import org.seepledger.aquifer.PlacedWell;
-import org.seepledger.aquifer.Screen;
+import org.seepledger.aquifer.GriddedValues;
 import org.seepledger.ledger.Group;
 import org.seepledger.ledger.PeriodBudget;
+import org.seepledger.picture.Body.Slab;
 import org.seepledger.picture.Mark.Fill;
 import org.seepledger.picture.Mark.Stroke;
-import org.seepledger.picture.Profile.Stretch;
+import org.seepledger.picture.Mark.Texture;
 import org.seepledger.prism.Prism;
+import org.seepledger.progress.Progress;
 import org.seepledger.unit.Figures;
 
 /**
- * A vertical section through a prism: layers, water level at the record's begin and end, the prism's body, wells nearby
- * with their screens, and the flow through its lids.
+ * Draws a vertical section: layers, values as colour, water levels, the bodies of prisms, wells nearby with their screens,
+ * and the flow through the lids of the prism that stands out.
  */
 public final class SectionPicture {
 
@@ -25,40 +25,29 @@ public final class SectionPicture {
     private static final double TOP = 22;
     private static final double LEFT = 48;
     private static final double RIGHT = 116;
-    private static final double KEY = 56;
     private static final double LEGEND = 360;
-
-    /** Neighbouring colours overlap by this, lest the paper shine through between them. */
-    private static final double SEAM = 0.4;
-
+    private static final double GAP = 4;
     private static final double SMALL = SectionSheet.SMALL;
-    private static final Stroke AT_START = Stroke.of(Ink.Token.WATER, 1.3).dashed(5.0, 3.0);
-    private static final Stroke AT_END = Stroke.of(Ink.Token.WATER, 2);
 
-    /** Wells are shown up to this share of the line's length beside it. */
+    /** Wells are shown up to this share of the line's length beside it, unless somebody says otherwise. */
     private static final double NEARBY = 0.04;
 
     private static final double LID_REACH = 12;
     private static final double LID_WIDTH = 5;
 
-    private final Aquifer aquifer;
-    private final SectionLine line;
-    private final double length;
-    private final Profile profile;
+    /** Where words beside a lid stand, clear of the lid when it is lit up. */
+    private static final double ABOVE_LID = -6;
+
+    private static final double BELOW_LID = 14;
+
+    private final Section section;
     private final SectionSheet sheet;
+    private final SectionKey key;
 
-    private final Optional<Shade> shade;
-
-    /** A value of each cell. */
-    public interface CellValues {
-        /**
-         * {@return the value; not finite where there is none}
-         *
-         * @param layer from 0
-         * @param row from 0 in the north
-         * @param column from 0
-         */
-        double at(int layer, int row, int column);
+    private SectionPicture(Section section, SectionFrame frame, SectionKey key) {
+        this.section = section;
+        this.sheet = new SectionSheet(frame);
+        this.key = key;
     }
 
     /**
@@ -68,19 +57,10 @@ public final class SectionPicture {
      * @param scale which colour a value has
      * @param words what the values are, with their unit
      */
-    public record Shade(CellValues values, ValueScale scale, String words) {}
-
-    private SectionPicture(Aquifer aquifer, SectionLine line, Profile profile, Optional<Shade> shade, double width) {
-        this.aquifer = aquifer;
-        this.line = line;
-        this.shade = shade;
-        this.length = line.length() * aquifer.grid().planUnit();
-        this.profile = profile;
-        this.sheet = new SectionSheet(profile, new Box(LEFT, TOP, width - LEFT - RIGHT, HEIGHT - TOP - KEY));
-    }
+    public record Shade(Profile.LayerValues values, ValueScale scale, String words) {}
 
     /**
-     * {@return the section; none where the line meets no layer}
+     * {@return a section through a prism with its budget over the record; none where the line meets no layer}
      *
      * @param aquifer the aquifer
      * @param prism the prism
@@ -113,98 +93,175 @@ public final class SectionPicture {
             UnitShown unit,
             Optional<Shade> shade,
             double width) {
-        Profile profile = Profile.along(line, aquifer, prism);
-        return SectionSheet.elevations(profile).findAny().isEmpty()
-                ? Optional.empty()
-                : Optional.of(new SectionPicture(aquifer, line, profile, shade, width).draw(prism, budget, unit));
+        int end = aquifer.times().intervals();
+        Profile profile = Profile.along(line, aquifer, 0, end, shade.map(Shade::values), Progress.NONE);
+        double within = nearby(profile);
+        boolean moves = aquifer.head().filter(GriddedValues::changes).isPresent();
+        Section section = new Section(
+                profile,
+                aquifer.layers(),
+                aquifer.lengthUnit().toString(),
+                moves ? Optional.of("record") : Optional.empty(),
+                List.of(Body.of(prism, profile)),
+                NearbyWell.of(aquifer, profile, within),
+                within,
+                shade.map(by -> new Section.Colours(by.scale(), by.words())),
+                new Section.Light(
+                        prism.name(), "", flow(budget, "top", unit), flow(budget, "bottom", unit), unit.words()));
+        return section.isThere() ? Optional.of(of(section, width, HEIGHT + legendHeight(section))) : Optional.empty();
     }
 
-    private Picture draw(Prism prism, PeriodBudget budget, UnitShown unit) {
-        shade.ifPresent(this::colour);
-        drawLayers();
-        sheet.level(stretch -> stretch.column().levelAtStart(), AT_START);
-        sheet.level(stretch -> stretch.column().levelAtEnd(), AT_END);
-        sheet.bodies(
-                Stretch::top,
-                Stretch::bottom,
-                new Fill(Ink.Token.PRISM, shade.isPresent() ? 0 : 0.14, Mark.Texture.PLAIN),
-                Stroke.of(Ink.Token.PRISM, 2));
-        aquifer.placedWells().forEach(this::drawWell);
-        drawLid(budget, "top", unit);
-        drawLid(budget, "bottom", unit);
-        List<Mark> marks = sheet.marks(length);
-        Box box = sheet.box();
-        marks.add(Mark.Text.of(box.x(), 14, "A", 13, Mark.Anchor.MIDDLE).strong());
-        marks.add(Mark.Text.of(box.right(), 14, "A′", 13, Mark.Anchor.MIDDLE).strong());
-        drawKey(marks, unit.words());
-        Box legend = new Box(box.x(), HEIGHT + 4, Math.min(LEGEND, box.width()), RampLegend.LEVEL_HEIGHT);
-        shade.ifPresent(by -> marks.addAll(RampLegend.level(by.scale(), 1, by.words(), legend)));
+    /**
+     * {@return a section, all of it, with what its colours mean}
+     *
+     * @param section the section
+     * @param width in logical pixels
+     * @param height in logical pixels
+     */
+    public static Picture of(Section section, double width, double height) {
+        Box box = box(section, width, height - legendHeight(section));
+        Picture bare = of(section, SectionFrame.fitting(section.profile(), box));
+        List<Mark> marks = new ArrayList<>(bare.marks());
+        Box legend = new Box(LEFT, bare.height() + GAP, Math.min(LEGEND, box.width()), RampLegend.LEVEL_HEIGHT);
+        section.colours()
+                .ifPresent(colours -> marks.addAll(RampLegend.level(colours.scale(), 1, colours.words(), legend)));
         return new Picture(
-                box.right() + RIGHT,
-                shade.isPresent() ? legend.bottom() + 4 : HEIGHT,
-                "Vertical section through " + prism.name(),
-                description(),
-                marks);
+                bare.width(), bare.height() + legendHeight(section), bare.title(), bare.description(), marks);
+    }
+
+    private static double legendHeight(Section section) {
+        return section.colours().isPresent() ? RampLegend.LEVEL_HEIGHT + 2 * GAP : 0;
+    }
+
+    /**
+     * {@return a part of a section, without what its colours mean}
+     *
+     * @param section the section
+     * @param frame which part, in the box that {@link #box} gives
+     */
+    public static Picture of(Section section, SectionFrame frame) {
+        double width = frame.box().right() + RIGHT;
+        return new SectionPicture(section, frame, new SectionKey(section, width - LEFT)).draw(width);
+    }
+
+    /**
+     * {@return the part of a picture that a section fills}
+     *
+     * @param section the section
+     * @param width of the picture, in logical pixels
+     * @param height of the picture
+     */
+    public static Box box(Section section, double width, double height) {
+        double key = new SectionKey(section, width - LEFT).height();
+        return new Box(LEFT, TOP, Math.max(40, width - LEFT - RIGHT), Math.max(30, height - TOP - key));
+    }
+
+    /**
+     * {@return how far from a section's line wells are shown unless somebody says otherwise: a round distance of some
+     * hundredths of its length, in length units}
+     *
+     * @param profile the aquifer along the line
+     */
+    public static double nearby(Profile profile) {
+        return Ticks.within(0, NEARBY * profile.length(), 2).step().doubleValue();
+    }
+
+    private Picture draw(double width) {
+        drawLayers();
+        sheet.level(section.profile().stretches(), stretch -> stretch.column().levelBefore(), SectionKey.AT_BEGIN);
+        sheet.level(section.profile().stretches(), stretch -> stretch.column().level(), SectionKey.AT_END);
+        for (Body body : section.bodies()) {
+            if (!body.name().equals(section.light().prism())) {
+                sheet.body(body.slabs(), fill(0.3), Optional.of(Stroke.of(Ink.Token.PRISM, 1)));
+            }
+        }
+        section.body()
+                .ifPresent(body -> sheet.body(body.slabs(), fill(0.5), Optional.of(Stroke.of(Ink.Token.PRISM, 2))));
+        section.body().ifPresent(this::drawLit);
+        section.wells().forEach(this::drawWell);
+        section.body().ifPresent(body -> {
+            drawLid(body, "top", section.light().top());
+            drawLid(body, "bottom", section.light().bottom());
+        });
+        section.bodies().forEach(this::name);
+        Box box = sheet.box();
+        List<Mark> marks = sheet.marks();
+        end(0, "A").ifPresent(marks::add);
+        end(section.profile().length(), "A′").ifPresent(marks::add);
+        marks.addAll(key.marks(box.x(), box.bottom() + 36, sheet.frame().exaggeration()));
+        return new Picture(width, box.bottom() + key.height(), title(), description(), marks);
+    }
+
+    private String title() {
+        String subject = section.light().prism();
+        return "Vertical section" + (subject.isEmpty() ? "" : " through " + subject)
+                + section.colours().map(by -> ", " + by.words()).orElse("");
+    }
+
+    /** The name of an end of the line, if that is seen. */
+    private Optional<Mark> end(double along, String name) {
+        double x = sheet.frame().x(along);
+        boolean seen = x >= sheet.box().x() - 1 && x <= sheet.box().right() + 1;
+        return seen
+                ? Optional.of(Mark.Text.of(x, 14, name, 13, Mark.Anchor.MIDDLE).strong())
+                : Optional.empty();
+    }
+
+    private static Fill fill(double opacity) {
+        return new Fill(Ink.Token.PRISM, opacity, Texture.RISING);
     }
 
     private String description() {
-        return "Layers, water level and the body of the prism along a line of " + Figures.shown(length) + " "
-                + aquifer.lengthUnit() + ", with heights " + sheet.exaggeration(length)
-                + " times exaggerated, and the net flow through top and bottom.";
-    }
-
-    /** Colours each cell that the line cuts, from its bottom to the lower one of its top and the water level. */
-    private void colour(Shade by) {
-        Grid grid = aquifer.grid();
-        for (Stretch stretch : profile.stretches()) {
-            double share = (stretch.from() + stretch.to()) / 2;
-            double x = line.x(share);
-            double y = line.y(share);
-            int row = grid.flipped(grid.y().nearest(grid.localY(x, y)));
-            int column = grid.x().nearest(grid.localX(x, y));
-            double[] surfaces = stretch.column().surfaces();
-            for (int layer = 0; layer + 1 < surfaces.length; layer++) {
-                double value = by.values().at(layer, row, column);
-                double level = aquifer.layers().get(layer).waterTable()
-                        ? stretch.column().levelAtEnd()
-                        : Double.NaN;
-                double upper = Double.isFinite(level) ? Math.min(surfaces[layer], level) : surfaces[layer];
-                if (Double.isFinite(value) && upper > surfaces[layer + 1]) {
-                    Box cell = new Box(
-                            sheet.x(stretch.from()),
-                            sheet.y(upper),
-                            sheet.x(stretch.to()) - sheet.x(stretch.from()) + SEAM,
-                            sheet.y(surfaces[layer + 1]) - sheet.y(upper));
-                    Ink ink = by.scale().ramp().ink(by.scale().share(value));
-                    sheet.inside(Mark.Area.of(cell, Fill.of(ink)));
-                }
-            }
-        }
+        return "Layers, water level and the bodies of prisms along a line of "
+                + Figures.shown(section.profile().length()) + " " + section.lengthUnit() + ", with heights "
+                + SectionKey.times(sheet.frame().exaggeration()) + " times exaggerated"
+                + (section.light().unit().isEmpty() ? "." : ", and the net flow through top and bottom.");
     }
 
     private void drawLayers() {
-        for (int k = 0; k < aquifer.layers().size(); k++) {
-            int layer = k;
-            sheet.bodies(
-                    stretch -> stretch.column().surfaces()[layer],
-                    stretch -> stretch.column().surfaces()[layer + 1],
-                    new Fill(Ink.Token.TEXT, shade.isPresent() ? 0 : k % 2 == 0 ? 0.05 : 0.13, Mark.Texture.PLAIN),
-                    Stroke.of(Ink.Token.MUTED, 0.6));
-            nameLayer(layer);
+        section.colours().ifPresent(colours -> sheet.inside(SectionColours.of(section, colours, sheet.frame())));
+        for (int layer = 0; layer < section.layers().size(); layer++) {
+            List<Slab> slabs = slabs(layer, false);
+            if (section.colours().isPresent()) {
+                Fill none = new Fill(Ink.Token.TEXT, 0, Texture.PLAIN);
+                sheet.body(slabs, none, Optional.of(Stroke.of(Ink.Token.PAPER, 1.8)));
+                sheet.body(slabs, none, Optional.of(Stroke.of(Ink.Token.TEXT, 0.7)));
+            } else {
+                Fill shade = new Fill(Ink.Token.TEXT, layer % 2 == 0 ? 0.05 : 0.13, Texture.PLAIN);
+                sheet.body(slabs, shade, Optional.of(Stroke.of(Ink.Token.MUTED, 0.6)));
+            }
+            sheet.body(slabs(layer, true), new Fill(Ink.Token.MUTED, 0.8, Texture.DOTS), Optional.empty());
+            nameLayer(layer, slabs);
         }
     }
 
+    /** What a layer takes up along the line, or those cells of it alone that are dry. */
+    private List<Slab> slabs(int layer, boolean dry) {
+        return section.profile().stretches().stream()
+                .filter(stretch ->
+                        stretch.column().surfaces()[layer] > stretch.column().surfaces()[layer + 1])
+                .filter(stretch -> !dry || section.isDry(stretch.column(), layer))
+                .map(stretch -> new Slab(
+                        stretch.from(),
+                        stretch.to(),
+                        stretch.column().surfaces()[layer],
+                        stretch.column().surfaces()[layer + 1]))
+                .toList();
+    }
+
     /** Writes a layer's name beside the frame, at the height that it has near it. */
-    private void nameLayer(int layer) {
-        List<Stretch> stretches = profile.stretches();
+    private void nameLayer(int layer, List<Slab> slabs) {
+        SectionFrame frame = sheet.frame();
         Box box = sheet.box();
-        for (int i = stretches.size() - 1; i >= 0; i--) {
-            double[] surfaces = stretches.get(i).column().surfaces();
-            double room = sheet.y(surfaces[layer + 1]) - sheet.y(surfaces[layer]);
-            if (room > 3 && stretches.get(i).to() > 0.75) {
-                double middle = (sheet.y(surfaces[layer]) + sheet.y(surfaces[layer + 1])) / 2 + 0.35 * SMALL;
-                String words = (layer + 1) + " " + aquifer.layers().get(layer).name();
+        for (int i = slabs.size() - 1; i >= 0; i--) {
+            Slab slab = slabs.get(i);
+            double upper = Math.max(box.y(), frame.y(slab.top()));
+            double lower = Math.min(box.bottom(), frame.y(slab.bottom()));
+            boolean near = slab.from() <= frame.to() && frame.x(slab.to()) > box.x() + 0.75 * box.width();
+            if (lower - upper > 3 && near) {
+                String words = (layer + 1) + " " + section.layers().get(layer).name();
                 String fitted = Lettering.fitted(words, SMALL, RIGHT - 8);
+                double middle = (upper + lower) / 2 + 0.35 * SMALL;
                 sheet.over()
                         .add(Mark.Text.of(box.right() + 6, middle, fitted, SMALL, Mark.Anchor.START)
                                 .in(Ink.Token.MUTED));
@@ -213,116 +270,98 @@ public final class SectionPicture {
         }
     }
 
-    private void drawWell(PlacedWell well) {
-        double wayX = line.toX() - line.fromX();
-        double wayY = line.toY() - line.fromY();
-        double awayX = well.well().x() - line.fromX();
-        double awayY = well.well().y() - line.fromY();
-        double share = (awayX * wayX + awayY * wayY) / (wayX * wayX + wayY * wayY);
-        double distance = Math.abs(wayX * awayY - wayY * awayX) / line.length();
-        if (share <= 0 || share >= 1 || distance > NEARBY * line.length()) {
+    private void drawWell(NearbyWell well) {
+        SectionFrame frame = sheet.frame();
+        double x = frame.x(well.along());
+        double ground = frame.y(well.ground());
+        double lower = frame.y(well.bottom());
+        if (Double.isNaN(ground + lower + well.top())
+                || x < sheet.box().x()
+                || x > sheet.box().right()) {
             return;
         }
-        profile.stretches().stream()
-                .filter(stretch -> stretch.to() >= share)
-                .findFirst()
-                .ifPresent(stretch ->
-                        drawWell(well, sheet.x(share), stretch.column().surfaces()));
-    }
-
-    private void drawWell(PlacedWell well, double x, double[] surfaces) {
-        double ground = sheet.y(surfaces[0]);
-        double upper;
-        double lower;
-        if (well.well().screen() instanceof Screen.InLayer in) {
-            upper = sheet.y(surfaces[in.layer()]);
-            lower = sheet.y(surfaces[in.layer() + 1]);
-        } else {
-            Screen.Between between = (Screen.Between) well.well().screen();
-            upper = sheet.y(between.top());
-            lower = sheet.y(between.bottom());
-        }
-        if (Double.isNaN(ground + upper + lower)) {
-            return;
-        }
+        double upper = frame.y(well.top());
+        sheet.inside(new Mark.Line(new double[] {x, ground - 6, x, lower}, Stroke.of(Ink.Token.PAPER, 4)));
         sheet.inside(new Mark.Line(new double[] {x, ground - 6, x, lower}, Stroke.of(Ink.Token.TEXT, 1.2)));
         sheet.inside(new Mark.Line(new double[] {x, upper, x, lower}, Stroke.of(Ink.Token.TEXT, 4)));
         sheet.labels()
                 .place(
-                        List.of(Mark.Text.of(x, ground - 9, well.well().name(), SMALL, Mark.Anchor.MIDDLE)
-                                .haloed()),
+                        List.of(
+                                Mark.Text.of(x, ground - 9, well.name(), SMALL, Mark.Anchor.MIDDLE)
+                                        .haloed(),
+                                Mark.Text.of(x, ground - 21, well.name(), SMALL, Mark.Anchor.MIDDLE)
+                                        .haloed()),
                         sheet.over());
     }
 
-    /** The net flow through a lid as an arrow into the body or out of it, in the middle of the cut. */
-    private void drawLid(PeriodBudget budget, String lid, UnitShown unit) {
-        Optional<NetFlow> flow = flow(budget, lid, unit);
-        Optional<Stretch> middle = middle();
-        if (flow.isEmpty() || middle.isEmpty()) {
+    /** The lid that is lit up, over all else of the body. */
+    private void drawLit(Body body) {
+        String lid = section.light().lid();
+        if (!lid.equals("top") && !lid.equals("bottom")) {
             return;
         }
-        double x = (sheet.x(middle.get().from()) + sheet.x(middle.get().to())) / 2;
+        SectionFrame frame = sheet.frame();
+        for (Slab slab : body.slabs()) {
+            double y = frame.y(lid.equals("top") ? slab.top() : slab.bottom());
+            double[] xy = {frame.x(slab.from()), y, frame.x(slab.to()), y};
+            sheet.inside(new Mark.Line(xy, Stroke.of(Ink.Token.PAPER, 7)));
+            sheet.inside(new Mark.Line(xy, Stroke.of(Ink.Token.ACCENT, 4)));
+        }
+    }
+
+    /** The net flow through a lid as an arrow into the body or out of it, in the middle of what is seen of the cut. */
+    private void drawLid(Body body, String lid, double net) {
+        Optional<Body.Spot> middle = body.spot(sheet.frame(), 0.5);
+        if (Double.isNaN(net) && section.light().unit().isEmpty() || middle.isEmpty()) {
+            return;
+        }
+        NetFlow flow = new NetFlow(net);
+        double x = sheet.frame().x(middle.get().along());
         boolean isTop = lid.equals("top");
-        double y = sheet.y(isTop ? middle.get().top() : middle.get().bottom());
-        if (flow.get().size() > 0) {
-            sheet.over().add(flow.get().arrow(x, y, 0, isTop ? -LID_REACH : LID_REACH, LID_WIDTH));
+        Slab slab = middle.get().slab();
+        double y = sheet.frame().y(isTop ? slab.top() : slab.bottom());
+        if (flow.size() > 0) {
+            sheet.over().add(flow.arrow(x, y, 0, isTop ? -LID_REACH : LID_REACH, LID_WIDTH));
             sheet.labels().keepFree(new Box(x - 8, y - LID_REACH - 1, 16, 2 * LID_REACH + 2));
         }
         List<Mark.Text> choices = new ArrayList<>();
         for (int side : new int[] {1, -1}) {
-            for (double shift : new double[] {isTop ? -4 : 11, isTop ? 11 : -4}) {
+            for (double shift : new double[] {isTop ? ABOVE_LID : BELOW_LID, isTop ? BELOW_LID : ABOVE_LID}) {
                 Mark.Anchor anchor = side > 0 ? Mark.Anchor.START : Mark.Anchor.END;
-                choices.add(Mark.Text.of(
-                                x + 11 * side,
-                                y + shift,
-                                lid + ": " + flow.get().words(),
-                                SMALL,
-                                anchor)
+                choices.add(Mark.Text.of(x + 11 * side, y + shift, lid + ": " + flow.words(), SMALL, anchor)
                         .strong()
                         .haloed()
-                        .in(flow.get().ink()));
+                        .in(flow.ink()));
             }
         }
         sheet.labels().place(choices, sheet.over());
     }
 
-    /** The net flow through a lid, if it can be given. */
-    private static Optional<NetFlow> flow(PeriodBudget budget, String lid, UnitShown unit) {
+    /** Names a body in it, or above it. */
+    private void name(Body body) {
+        boolean subject = body.name().equals(section.light().prism());
+        body.spot(sheet.frame(), 0.5).ifPresent(spot -> {
+            double x = sheet.frame().x(spot.along());
+            double high = sheet.frame().y(spot.slab().top());
+            double low = sheet.frame().y(spot.slab().bottom());
+            List<Mark.Text> choices = new ArrayList<>();
+            for (double y : new double[] {(high + low) / 2 + 4, high + 16, low - 8, high - 6, high - 18}) {
+                Mark.Text text = Mark.Text.of(x, y, body.name(), subject ? 12 : SMALL, Mark.Anchor.MIDDLE)
+                        .haloed();
+                choices.add((subject ? text.strong() : text).in(Ink.Token.PRISM));
+            }
+            sheet.labels().place(choices, sheet.over());
+        });
+    }
+
+    /** The net flow through a lid; NaN where it cannot be given. */
+    private static double flow(PeriodBudget budget, String lid, UnitShown unit) {
         return budget.entries().stream()
                 .filter(entry -> entry.account().group() == Group.LID
                         && entry.account().item().equals(lid)
                         && entry.account().quantified())
                 .map(entry -> unit.of(entry.net(), budget.period()))
                 .reduce(Double::sum)
-                .map(NetFlow::new);
-    }
-
-    /** The stretch in the middle of those that lie in the prism. */
-    private Optional<Stretch> middle() {
-        List<Stretch> cut =
-                profile.stretches().stream().filter(Stretch::isInPrism).toList();
-        return cut.isEmpty() ? Optional.empty() : Optional.of(cut.get(cut.size() / 2));
-    }
-
-    private void drawKey(List<Mark> marks, String unit) {
-        Box box = sheet.box();
-        double y = box.bottom() + 36;
-        double x = box.x();
-        if (profile.stretches().stream()
-                .anyMatch(stretch -> Double.isFinite(stretch.column().levelAtEnd()))) {
-            marks.add(new Mark.Line(new double[] {x, y - 3, x + 22, y - 3}, AT_END));
-            boolean moves = aquifer.head().get().changes();
-            String level = moves ? "water level, end of record" : "water level";
-            marks.add(Mark.Text.of(x + 27, y, level, SMALL, Mark.Anchor.START).in(Ink.Token.MUTED));
-            x += 27 + Lettering.width(level, SMALL) + 14;
-            if (moves) {
-                marks.add(new Mark.Line(new double[] {x, y - 3, x + 22, y - 3}, AT_START));
-                marks.add(Mark.Text.of(x + 27, y, "at its begin", SMALL, Mark.Anchor.START)
-                        .in(Ink.Token.MUTED));
-            }
-        }
-        String units = "Elevation and distance in " + aquifer.lengthUnit() + ", heights " + sheet.exaggeration(length)
-                + " times exaggerated; flow in " + unit;
-        marks.add(Mark.Text.of(box.x(), y + 15, units, SMALL, Mark.Anchor.START).in(Ink.Token.MUTED));
+                .orElse(Double.NaN);
     }
 }

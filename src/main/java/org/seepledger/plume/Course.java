@@ -84,6 +84,17 @@ public final class Course {
     }
 
     /**
+     * {@return whether the centre at an instant is a plume's: mass is there, and hardly any of it rests on non-detects, which
+     * stand for themselves wherever nothing was found}
+     *
+     * @param instant from 0
+     */
+    public boolean isLocated(int instant) {
+        Stock stock = plume.whole(instant);
+        return stock.total(NonDetects.HALF) > 0 && stock.undetectedShare() <= NonDetects.TOO_MUCH;
+    }
+
+    /**
      * {@return gross outflow through sides and lids in an interval, advective and dispersive, kg/time}
      *
      * @param interval from 0

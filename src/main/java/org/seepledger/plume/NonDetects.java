@@ -12,6 +12,9 @@ public enum NonDetects {
     /** The limit. */
     LIMIT(1);
 
+    /** From this share of mass on, what stands for non-detects decides too much. */
+    public static final double TOO_MUCH = 0.15;
+
     private final double share;
 
     NonDetects(double share) {

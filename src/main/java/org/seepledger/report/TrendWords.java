@@ -2,6 +2,7 @@ package org.seepledger.report;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.IntStream;
 import org.seepledger.aquifer.Times;
 import org.seepledger.io.result.MassUnits;
 import org.seepledger.plume.Course;
@@ -30,29 +31,44 @@ final class TrendWords {
 
     /** The way of the centre of mass, and the spread about it; what a prism holds, not what lies beyond it. */
     List<String> path() {
-        Course.Place first = result.course().at(0);
-        Course.Place last = result.course().at(result.end());
-        if (!(first.mass() > 0) || !(last.mass() > 0)) {
-            return List.of("There is no centre of mass at the " + (last.mass() > 0 ? "begin." : "end."));
+        int[] located = IntStream.rangeClosed(0, result.end())
+                .filter(result.course()::isLocated)
+                .toArray();
+        if (located.length < 2) {
+            return List.of(
+                    "At " + (located.length == 0 ? "no" : "only one") + " instant is there mass that hardly rests on"
+                            + " non-detects, so that no way of a centre can be given.");
         }
+        int begin = located[0];
+        int end = located[located.length - 1];
+        Course.Place first = result.course().at(begin);
+        Course.Place last = result.course().at(end);
         double way = Math.hypot(last.x() - first.x(), last.y() - first.y())
                 * result.aquifer().grid().planUnit();
-        double time = times.instant(result.end()) - times.instant(0);
+        double time = times.instant(end) - times.instant(begin);
         return List.of(
-                "The centre of mass moves " + length(way) + " in plan, " + length(way / time) + "/" + times.unit()
+                "From " + instant(begin) + " to " + instant(end) + " the centre of mass moves " + length(way)
+                        + " in plan, " + length(way / time) + "/" + times.unit()
                         + " on average, and from elevation " + length(first.elevation()) + " to "
                         + length(last.elevation()) + ".",
                 "The spread (one standard deviation) along the longer axis goes from " + length(first.along()) + " to "
                         + length(last.along()) + ", across from " + length(first.across()) + " to "
                         + length(last.across()) + ", upright from " + length(first.upright()) + " to "
                         + length(last.upright()) + ".",
-                "Centre and spread are of what lies within the prism: mass that leaves it is no longer in them.");
+                "Centre and spread are of what lies within the prism: mass that leaves it is no longer in them. Instants at"
+                        + " which more than 15 % of the mass rests on non-detects are left out.");
+    }
+
+    private String instant(int instant) {
+        double time = times.instant(instant);
+        return times.isoDate(time)
+                .orElseGet(() -> "time " + wording.quantity(time, times.unit().toString()));
     }
 
     /** What mass in place and outflow show. */
     List<String> trend() {
         List<String> sentences = new ArrayList<>();
-        String perTime = "/" + times.unit();
+        String perTime = " per " + times.unit();
         add(
                 sentences,
                 "Mass in place",
@@ -68,7 +84,7 @@ final class TrendWords {
                         "outflow through faces",
                         trend,
                         units.rateFactor(),
-                        wording.unit(units.rate()) + " " + perTime));
+                        wording.unit(units.rate()) + perTime));
         if (result.plume().limitsRatio() > 1 + ROUNDING) {
             sentences.add("Detection limits differ; a trend may be the limits' alone.");
         }

@@ -2,6 +2,7 @@ package org.seepledger.report;
 
 import java.util.List;
 import java.util.function.DoubleFunction;
+import java.util.function.UnaryOperator;
 import org.seepledger.io.result.ResultUnits;
 import org.seepledger.unit.Figures;
 import org.seepledger.unit.Measure;
@@ -41,6 +42,20 @@ public final class Wording {
      */
     public static Wording typeset(ResultUnits units) {
         return new Wording(units, Figures::typeset, Figures::typesetPercent, true);
+    }
+
+    /**
+     * {@return the wording of the window, with numbers in the form that its user wants}
+     *
+     * @param units the units to give
+     * @param form turns a typeset number into that form
+     */
+    public static Wording typeset(ResultUnits units, UnaryOperator<String> form) {
+        return new Wording(
+                units,
+                value -> form.apply(Figures.typeset(value)),
+                value -> form.apply(Figures.typesetPercent(value)),
+                true);
     }
 
     /**

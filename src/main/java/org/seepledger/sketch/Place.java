@@ -88,7 +88,7 @@ public record Place(double x, double y) {
      * @param from where the side begins
      * @param to where it ends
      */
-    Place nearestOn(Place from, Place to) {
+    public Place nearestOn(Place from, Place to) {
         double dx = to.x - from.x;
         double dy = to.y - from.y;
         if (dx == 0) {

@@ -46,6 +46,11 @@ public sealed interface Reach {
                     && !(upper.height() > lower.height())) {
                 throw new Refusal("The top lies above the bottom.");
             }
+            if (top.orElse(null) instanceof Limit.Layer upper
+                    && bottom.orElse(null) instanceof Limit.Layer lower
+                    && upper.index() > lower.index()) {
+                throw new Refusal("The top lies above the bottom.");
+            }
         }
     }
 
@@ -59,13 +64,11 @@ public sealed interface Reach {
     default VerticalRange on(int layers, Surfaces surfaces) {
         if (this instanceof Between between) {
             return new VerticalRange.Elevations(
-                    between.top().map(limit -> values(limit, "top", surfaces)),
-                    between.bottom().map(limit -> values(limit, "bottom", surfaces)));
+                    between.top().map(limit -> values(limit, "top", layers, surfaces)),
+                    between.bottom().map(limit -> values(limit, "bottom", layers, surfaces)));
         }
         if (this instanceof Layers stack) {
-            if (stack.last() >= layers) {
-                throw new Refusal("The grid has " + layers + (layers == 1 ? " layer." : " layers."));
-            }
+            check(stack.last(), layers);
             return new VerticalRange.Layers(stack.first(), stack.last());
         }
         return new VerticalRange.Layers(0, layers - 1);
@@ -82,9 +85,18 @@ public sealed interface Reach {
                 : List.of();
     }
 
-    private static GriddedValues values(Limit limit, String lid, Surfaces surfaces) {
+    private static GriddedValues values(Limit limit, String lid, int layers, Surfaces surfaces) {
+        if (limit instanceof Limit.Layer layer) {
+            check(layer.index(), layers);
+        }
         return limit instanceof Limit.Elevation elevation
                 ? GriddedValues.constant(elevation.height())
-                : surfaces.read((Limit.Surface) limit, lid);
+                : surfaces.read(limit, lid);
+    }
+
+    private static void check(int layer, int layers) {
+        if (layer >= layers) {
+            throw new Refusal("The grid has " + layers + (layers == 1 ? " layer." : " layers."));
+        }
     }
 }

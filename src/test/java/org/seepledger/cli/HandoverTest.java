@@ -134,7 +134,12 @@ class HandoverTest {
         assertThat(set.resolve("prisms.geojson")).content().contains("\"well field\"");
         try (Stream<Path> pictures = Files.list(out.resolve("pictures"))) {
             assertThat(pictures.map(file -> file.getFileName().toString()))
-                    .contains("map north fields.svg", "map north fields.png", "section north fields.svg");
+                    .contains(
+                            "map north fields.svg",
+                            "map north fields.png",
+                            "section north fields.svg",
+                            "map as shown.svg",
+                            "map as shown.png");
         }
         window.robot.clickOn("#handover-open-report").clickOn("#handover-open-folder");
         assertThat(window.answers.opened).containsExactly(out.resolve("budget/report.html"), out);

@@ -4,11 +4,18 @@ import java.awt.image.BufferedImage;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.List;
+import java.util.Optional;
+import javafx.scene.control.Label;
+import javafx.scene.control.ListView;
 import javafx.scene.image.Image;
 import javafx.scene.image.PixelFormat;
 import javax.imageio.ImageIO;
 import org.seepledger.desktop.theme.Theme;
+import org.seepledger.intake.LooseValley;
 import org.seepledger.job.MapQuantity;
+import org.seepledger.picture.SectionLine;
+import org.seepledger.sketch.Place;
 
 /** Writes pictures of each view, light and dark, in two sizes, into the folder given. */
 public final class Screenshots {
@@ -28,6 +35,7 @@ public final class Screenshots {
                 String suffix = "-" + size[0] + "x" + size[1] + ".png";
                 window.await(() -> !window.assembly().welcome().samples().isEmpty());
                 both(window, folder, "welcome", suffix);
+                looseFiles(window, folder, suffix);
                 window.openSet(Path.of("sample-aquifers/valley"));
                 window.settle();
                 window.settle();
@@ -36,18 +44,36 @@ public final class Screenshots {
                     window.robot.clickOn("#folio-" + page);
                     both(window, folder, page, suffix);
                 }
+                section(window, folder, suffix);
+                window.robot.clickOn("side 3").clickOn("#ledger-origin");
+                window.await(() -> isFilled(window, "#origin-table"));
+                window.robot.interact(() -> window.robot
+                        .lookup("#origin-table")
+                        .queryTableView()
+                        .getSelectionModel()
+                        .selectRange(0, 8));
+                both(window, folder, "origin", suffix);
+                window.robot.clickOn("#folio-ledger").clickOn("#hand-over");
+                window.settle();
+                both(window, folder, "handover", suffix);
+                press(window, javafx.scene.input.KeyCode.ESCAPE);
                 window.robot.interact(() -> {
                     window.assembly().map().showPrism();
                     window.assembly().tray().flipCard();
                 });
-                window.robot.press(javafx.scene.input.KeyCode.TAB).release(javafx.scene.input.KeyCode.TAB);
+                press(window, javafx.scene.input.KeyCode.TAB);
                 window.settle();
                 both(window, folder, "draw", suffix);
                 window.robot.interact(() -> window.assembly().tray().flipCard());
-                window.robot.press(javafx.scene.input.KeyCode.F1).release(javafx.scene.input.KeyCode.F1);
+                press(window, javafx.scene.input.KeyCode.F1);
                 window.settle();
                 both(window, folder, "actions", suffix);
-                window.robot.type(javafx.scene.input.KeyCode.ESCAPE);
+                window.robot.press(javafx.scene.input.KeyCode.ESCAPE).release(javafx.scene.input.KeyCode.ESCAPE);
+                window.robot.interact(window.assembly().view()::showPreferences);
+                both(window, folder, "preferences", suffix);
+                window.robot.interact(window.assembly().view()::showNotices);
+                both(window, folder, "messages", suffix);
+                press(window, javafx.scene.input.KeyCode.ESCAPE);
                 solutes(window, folder, suffix);
             }
         }
@@ -75,6 +101,50 @@ public final class Screenshots {
             window.settle();
             both(window, folder, "solute-" + page, suffix);
         }
+    }
+
+    private static void section(OpenWindow window, Path folder, String suffix) throws IOException {
+        SectionLine line = new SectionLine(
+                List.of(new Place(500150, 5201350), new Place(501250, 5201500), new Place(502900, 5200950)));
+        window.robot.interact(() -> {
+            window.assembly().session().sectionLine().set(Optional.of(line));
+            window.assembly().session().selected().set("river meadow");
+            window.assembly().session().lit().set("bottom");
+        });
+        window.settle();
+        window.robot.moveTo("#section-canvas");
+        both(window, folder, "section", suffix);
+        window.robot.interact(() -> {
+            window.assembly().session().sectionLine().set(Optional.empty());
+            window.assembly().session().selected().set("well field");
+            window.assembly().shelf().open(0);
+        });
+        window.settle();
+    }
+
+    private static void press(OpenWindow window, javafx.scene.input.KeyCode key) {
+        window.robot.press(key).release(key);
+    }
+
+    private static boolean isFilled(OpenWindow window, String table) {
+        return !window.robot.lookup(table).queryTableView().getItems().isEmpty();
+    }
+
+    /** The import assistant with the valley's files as a stranger would have them. */
+    private static void looseFiles(OpenWindow window, Path folder, String suffix) throws IOException {
+        Path loose = Files.createTempDirectory("loose").resolve("valley");
+        LooseValley.scatter(loose);
+        window.robot.interact(() -> window.assembly().intake().bring(List.of(loose)));
+        window.await(() -> window.robot
+                .lookup("#intake-verdict")
+                .queryAs(Label.class)
+                .getText()
+                .contains("way"));
+        ListView<?> items = window.robot.lookup("#intake-items").queryAs(ListView.class);
+        window.robot.interact(() -> items.getSelectionModel().select(8));
+        window.settle();
+        both(window, folder, "loose-files", suffix);
+        window.robot.interact(() -> window.assembly().intake().shown().set(false));
     }
 
     private static void both(OpenWindow window, Path folder, String name, String suffix) throws IOException {

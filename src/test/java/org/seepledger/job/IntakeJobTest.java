@@ -91,7 +91,7 @@ class IntakeJobTest {
     @Test
     void theCheckSaysWhatInspectWillSay() {
         Composition composition = Composition.of(plan(), false);
-        String checked = IntakeJob.check(composition, 2, Progress.NONE);
+        String checked = IntakeJob.check(composition, 2, Progress.NONE).text();
         IntakeJob.write(composition, target, 2, Progress.NONE);
         assertThat(checked).isEqualTo(InspectJob.run(target, 2, Progress.NONE));
     }

@@ -162,7 +162,7 @@ class DepotSampleTest {
                     new PrismsReader(
                                     folder.crs(),
                                     folder.aquifer().grid(),
-                                    1,
+                                    folder.aquifer().layers(),
                                     false,
                                     (name, place) -> null,
                                     note -> {},

@@ -76,7 +76,7 @@ class ShapeTest {
                 .hasMessage("The grid has 3 layers.");
         Reach between = new Reach.Between(
                 Optional.of(new Limit.Elevation(12.5)), Optional.of(new Limit.Surface("surfaces/base.tif")));
-        Surfaces surfaces = (surface, lid) -> GriddedValues.constant((surface.path() + lid).length());
+        Surfaces surfaces = (surface, lid) -> GriddedValues.constant((((Limit.Surface) surface).path() + lid).length());
         VerticalRange.Elevations range = (VerticalRange.Elevations)
                 FIELD.reaching(between).prism(3, surfaces).range();
         assertThat(value(range.top().orElseThrow())).isEqualTo(12.5);

@@ -25,6 +25,15 @@ public final class Actions {
         }
     }
 
+    /**
+     * Does an action, if it can be done.
+     *
+     * @param name the key of its words
+     */
+    public void perform(String name) {
+        actions.stream().filter(action -> action.name().equals(name)).forEach(Action::perform);
+    }
+
     /** {@return all of them} */
     public List<Action> all() {
         return Collections.unmodifiableList(actions);

@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Optional;
 import org.seepledger.balance.Periods;
 import org.seepledger.desktop.session.OpenSet;
+import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.job.IntervalBudget;
 import org.seepledger.job.RecordBudget;
@@ -34,17 +35,18 @@ public record BudgetShown(Prism prism, double area, PeriodBudget budget, List<St
      * {@return whose budget it is, and of when, in a line}
      *
      * @param set the set
+     * @param form how numbers are written
      */
-    public String whose(OpenSet set) {
+    public String whose(OpenSet set, NumberForm form) {
         Period period = budget.period();
         String unit = Wording.raised(Measure.power(set.aquifer().lengthUnit(), 2));
         return Words.of(
                 "budget.belongs",
                 prism.name(),
                 reach(set),
-                Figures.tabular(area),
+                form.of(Figures.tabular(area)),
                 unit,
-                PeriodWords.of(period, set.aquifer().times()));
+                PeriodWords.of(period, set.aquifer().times(), form));
     }
 
     private String reach(OpenSet set) {

@@ -3,6 +3,7 @@ package org.seepledger.desktop.budget;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.DoubleUnaryOperator;
 import org.seepledger.balance.Periods;
 import org.seepledger.desktop.session.Drawing;
 import org.seepledger.desktop.session.FaceFlows;
@@ -15,7 +16,7 @@ import org.seepledger.ledger.Period;
 import org.seepledger.prism.Prism;
 import org.seepledger.report.Term;
 
-/** Tells the map what water flows through the selected prism's sides in the interval looked at, where no solute is. */
+/** Tells map and section what water flows through the selected prism's faces in the interval looked at, where no solute is. */
 public final class FaceFeed {
 
     private final Session session;
@@ -68,14 +69,19 @@ public final class FaceFeed {
         Drawing drawing = session.drawing().get();
         return live.known().get().budget(prism, interval).map(shown -> {
             ResultUnits units = reading.inUse(set);
-            Map<String, Double> net = new LinkedHashMap<>();
-            for (Term term : Term.of(shown.budget())) {
-                if (term.group() == Group.SIDE) {
-                    net.put(term.item(), term.net() / interval.duration() * units.rateFactor());
-                }
-            }
+            DoubleUnaryOperator rate = volume -> volume / interval.duration() * units.rateFactor();
+            Map<String, Double> net = nets(shown, Group.SIDE, rate);
             long revision = shown.prism().equals(prism) ? drawing.revision() : FaceFlows.NONE.revision();
-            return new FaceFlows(revision, prism.name(), units.rate().toString(), net);
+            String unit = units.rate().toString();
+            return new FaceFlows(revision, prism.name(), unit, net, nets(shown, Group.LID, rate));
         });
+    }
+
+    private static Map<String, Double> nets(BudgetShown shown, Group group, DoubleUnaryOperator rate) {
+        Map<String, Double> nets = new LinkedHashMap<>();
+        Term.of(shown.budget()).stream()
+                .filter(term -> term.group() == group)
+                .forEach(term -> nets.put(term.item(), rate.applyAsDouble(term.net())));
+        return nets;
     }
 }

@@ -2,7 +2,9 @@ package org.seepledger.desktop.budget;
 
 import java.time.LocalDateTime;
 import java.time.format.DateTimeFormatter;
+import java.util.Locale;
 import org.seepledger.aquifer.Times;
+import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.ledger.Period;
 import org.seepledger.unit.Figures;
@@ -10,7 +12,7 @@ import org.seepledger.unit.Figures;
 /** Periods in words. */
 public final class PeriodWords {
 
-    private static final DateTimeFormatter MINUTE = DateTimeFormatter.ofPattern("yyyy-MM-dd HH:mm");
+    private static final DateTimeFormatter MINUTE = DateTimeFormatter.ofPattern("yyyy-MM-dd HH:mm", Locale.ROOT);
 
     private PeriodWords() {}
 
@@ -19,15 +21,16 @@ public final class PeriodWords {
      *
      * @param period the period
      * @param times the record's instants
+     * @param form how numbers are written
      */
-    public static String of(Period period, Times times) {
+    public static String of(Period period, Times times, NumberForm form) {
         return times.hasDates()
                 ? Words.of("period.dates", period.name(), date(times, period.from()), date(times, period.to()))
                 : Words.of(
                         "period.times",
                         period.name(),
-                        Figures.typeset(period.from()),
-                        Figures.typeset(period.to()),
+                        form.of(Figures.typeset(period.from())),
+                        form.of(Figures.typeset(period.to())),
                         times.unit());
     }
 

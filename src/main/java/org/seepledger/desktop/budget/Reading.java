@@ -40,6 +40,8 @@ public final class Reading {
     private final StringProperty volumeUnit = new SimpleStringProperty("");
     private final ReadOnlyBooleanWrapper dated = new ReadOnlyBooleanWrapper();
     private final ReadOnlyLongWrapper changes = new ReadOnlyLongWrapper();
+    private String wantedRate = "";
+    private String wantedVolume = "";
     private final IntegerProperty waterYearStart = new SimpleIntegerProperty(OCTOBER);
 
     /**
@@ -52,13 +54,36 @@ public final class Reading {
         session.set().addListener((set, before, after) -> {
             dated.set(after.filter(open -> open.aquifer().times().hasDates()).isPresent());
             every.set(Periods.Every.INTERVAL);
-            rateUnit.set("");
-            volumeUnit.set("");
+            rateUnit.set(wantedRate);
+            volumeUnit.set(wantedVolume);
             changes.set(changes.get() + 1);
         });
-        for (Observable choice : List.of(every, volumes, rateUnit, volumeUnit, waterYearStart)) {
+        for (Observable choice : List.of(every, volumes, rateUnit, volumeUnit, waterYearStart, session.numbers())) {
             choice.addListener(changed -> changes.set(changes.get() + 1));
         }
+    }
+
+    /**
+     * Takes other units, for the open set and those to come.
+     *
+     * @param rate the unit of rates; empty for the set's own
+     * @param volume the unit of volumes; empty for the set's own
+     */
+    public void want(String rate, String volume) {
+        wantedRate = rate;
+        wantedVolume = volume;
+        rateUnit.set(rate);
+        volumeUnit.set(volume);
+    }
+
+    /** {@return units of rates, as users write them} */
+    public static List<String> rateUnits() {
+        return RATES;
+    }
+
+    /** {@return units of volumes, as users write them} */
+    public static List<String> volumeUnits() {
+        return VOLUMES;
     }
 
     /** {@return how often the reading has changed} */

@@ -27,6 +27,7 @@ import org.seepledger.ledger.Ledger;
 import org.seepledger.ledger.Period;
 import org.seepledger.picture.BudgetSeries;
 import org.seepledger.picture.MassCurve;
+import org.seepledger.picture.Picture;
 import org.seepledger.report.Wording;
 
 /** The selected prism's budgets through time, and the interval looked at among them. */
@@ -157,10 +158,11 @@ public final class ChartModel {
         return ofSolute()
                 ? masses(width, height)
                         .map(curve -> new Drawn(
-                                curve.picture(), x -> curve.intervalAt(x).ifPresent(this::look)))
+                                written(curve.picture()),
+                                x -> curve.intervalAt(x).ifPresent(this::look)))
                 : chart(width, height)
                         .map(series -> new Drawn(
-                                series.picture(), x -> series.periodAt(x).ifPresent(this::lookAtPeriod)));
+                                picture(series), x -> series.periodAt(x).ifPresent(this::lookAtPeriod)));
     }
 
     /**
@@ -207,6 +209,19 @@ public final class ChartModel {
                 }));
     }
 
+    /**
+     * {@return a chart as a picture, its numbers in the form chosen}
+     *
+     * @param chart the chart
+     */
+    public Picture picture(BudgetSeries chart) {
+        return written(chart.picture());
+    }
+
+    private Picture written(Picture picture) {
+        return picture.written(session.numbers().get()::label);
+    }
+
     private Optional<Ledger> ledger() {
         return live.whole()
                 .get()
@@ -241,7 +256,8 @@ public final class ChartModel {
                         open.workbench()
                                 .periods(Periods.Every.INTERVAL, 1)
                                 .get(session.interval().get()),
-                        open.aquifer().times()))
+                        open.aquifer().times(),
+                        session.numbers().get()))
                 .orElse(""));
         changes.set(changes.get() + 1);
     }

@@ -3,6 +3,7 @@ package org.seepledger.desktop.chart;
 import java.util.Optional;
 import javafx.beans.value.ObservableValue;
 import javafx.scene.Cursor;
+import javafx.scene.Node;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.control.Slider;
@@ -16,7 +17,7 @@ import org.seepledger.desktop.theme.Theme;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.picture.Picture;
 
-/** The chart, and above it the slider of the interval looked at; a click or drag on the chart moves it too. */
+/** The chart, and for above it the slider of the interval looked at; a click or drag on the chart moves it too. */
 public final class ChartView extends BorderPane {
 
     private static final double LEAST_HEIGHT = 196;
@@ -48,7 +49,6 @@ public final class ChartView extends BorderPane {
         scroll.setFitToHeight(true);
         scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
         setMinHeight(LEAST_HEIGHT);
-        setTop(time());
         setCenter(new StatePane(scroll, model.state()).withAction(Words.of("budget.draw"), model::draw));
         setRight(trend());
         model.changes().addListener((changes, before, after) -> show());
@@ -75,7 +75,8 @@ public final class ChartView extends BorderPane {
         return words;
     }
 
-    private HBox time() {
+    /** {@return the slider of the interval looked at, to be put above the chart} */
+    public Node bar() {
         Label when = new Label();
         when.setId("interval-words");
         when.getStyleClass().add("sl-belongs");

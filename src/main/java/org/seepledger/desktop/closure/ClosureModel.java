@@ -132,7 +132,8 @@ public final class ClosureModel {
                                         shown.budget(),
                                         BudgetBlocks.Flows.NET,
                                         reading.shown(set),
-                                        Math.max(300, width)))));
+                                        Math.max(300, width)))
+                                .map(blocks -> blocks.written(session.numbers().get()::label))));
     }
 
     /** Asks the map to show imbalance. */
@@ -189,7 +190,7 @@ public final class ClosureModel {
         PrismResult result = PrismResult.of(set.aquifer(), record.balance(), budgets, prism);
         ResultUnits units = reading.inUse(set);
         StatedOrigins origins = StatedOrigins.of(set.aquifer(), set.workbench().origins());
-        points.setAll(Answer.of(result, origins, Wording.typeset(units)).points());
+        points.setAll(Answer.of(result, origins, wording(units)).points());
         warnings.addAll(set.workbench().warnings());
         warnings.addAll(record.warnings());
         notes.addAll(set.workbench().notes());
@@ -198,14 +199,19 @@ public final class ClosureModel {
             leads.setAll(ClosureLeads.of(set.aquifer(), result));
             result.whereabouts().largest().forEach(cell -> spots.add(spot(set, cell, units)));
         }
-        belongs.set(BudgetShown.whole(set, record, result.prism()).orElseThrow().whose(set));
+        belongs.set(BudgetShown.whole(set, record, result.prism())
+                .orElseThrow()
+                .whose(set, session.numbers().get()));
     }
 
-    private static Spot spot(OpenSet set, HotSpot cell, ResultUnits units) {
+    private Wording wording(ResultUnits units) {
+        return Wording.typeset(units, session.numbers().get()::of);
+    }
+
+    private Spot spot(OpenSet set, HotSpot cell, ResultUnits units) {
         String where = Words.of(
                 "closure.cell", set.aquifer().layers().get(cell.layer()).name(), cell.row() + 1, cell.column() + 1);
-        Wording words = Wording.typeset(units);
-        String imbalance = words.rate(cell.imbalance(), 1);
+        String imbalance = wording(units).rate(cell.imbalance(), 1);
         return new Spot(cell, CellPlace.of(set.aquifer().grid(), cell), where, imbalance);
     }
 }

@@ -8,6 +8,7 @@ import java.util.regex.Pattern;
 import java.util.stream.Stream;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.sketch.Buffer;
+import org.seepledger.sketch.Lid;
 import org.seepledger.sketch.Limit;
 import org.seepledger.sketch.Reach;
 import org.seepledger.sketch.Refusal;
@@ -55,18 +56,25 @@ final class CardModel {
         }
         int first = Integer.parseInt(typed.group(1));
         int last = typed.group(2) == null ? first : Integer.parseInt(typed.group(2));
-        int count = model.session()
-                .set()
-                .get()
-                .map(set -> set.aquifer().layers().size())
-                .orElse(1);
+        int count = count();
         if (first < 1 || last < first || last > count) {
             throw new Refusal(Words.of("card.layers.range", count));
         }
         return new Reach.Layers(first - 1, last - 1);
     }
 
-    /** Elevations or surfaces of top and bottom; nothing for the grid's own. A surface that is not known yet is read first. */
+    private int count() {
+        return model.session()
+                .set()
+                .get()
+                .map(set -> set.aquifer().layers().size())
+                .orElse(1);
+    }
+
+    /**
+     * Elevations, layers or surfaces of top and bottom; nothing for the grid's own. A surface that is not known yet is
+     * read first.
+     */
     void lids(String top, String bottom) {
         Optional<Limit> upper = lid(top);
         Optional<Limit> lower = lid(bottom);
@@ -87,15 +95,15 @@ final class CardModel {
         }
     }
 
-    private static Optional<Limit> lid(String text) {
-        String typed = text.strip();
-        OptionalDouble elevation = number(typed);
-        return typed.isEmpty()
-                ? Optional.empty()
-                : Optional.of(
-                        elevation.isPresent()
-                                ? new Limit.Elevation(elevation.getAsDouble())
-                                : new Limit.Surface(typed));
+    private Optional<Limit> lid(String text) {
+        if (text.isBlank()) {
+            return Optional.empty();
+        }
+        Optional<Limit> typed = Lid.typed(text);
+        if (typed.isPresent() && typed.get() instanceof Limit.Layer layer && layer.index() >= count()) {
+            throw new Refusal(Words.of("card.layers.range", count()));
+        }
+        return typed.or(() -> Optional.of(new Limit.Surface(text.strip())));
     }
 
     private static OptionalDouble number(String text) {
@@ -176,9 +184,7 @@ final class CardModel {
                 .filter(Reach.Between.class::isInstance)
                 .map(Reach.Between.class::cast)
                 .flatMap(lid)
-                .map(limit -> limit instanceof Limit.Elevation elevation
-                        ? Double.toString(elevation.height()).replaceFirst("\\.0$", "")
-                        : ((Limit.Surface) limit).path())
+                .map(Lid::text)
                 .orElse("");
     }
 }

@@ -52,7 +52,11 @@ public final class DraftHand implements Hand {
     }
 
     private boolean isStroke() {
-        return tool() == Tool.POLYGON || tool() == Tool.ISLAND || tool() == Tool.SPLIT || tool() == Tool.TRANSECT;
+        return tool() == Tool.POLYGON
+                || tool() == Tool.ISLAND
+                || tool() == Tool.SPLIT
+                || tool() == Tool.SECTION
+                || tool() == Tool.TRANSECT;
     }
 
     @Override

@@ -11,6 +11,8 @@ import javafx.beans.property.ReadOnlyLongWrapper;
 import javafx.beans.property.SimpleObjectProperty;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.GriddedValues;
+import org.seepledger.aquifer.Layer;
+import org.seepledger.desktop.session.Drafting;
 import org.seepledger.desktop.session.DrawnShapes;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.session.Transects;
@@ -24,7 +26,7 @@ import org.seepledger.sketch.Refusal;
 import org.seepledger.sketch.Shape;
 
 /** The drawing of prisms with all its steps; each change is told to the session. */
-public final class DraftModel {
+public final class DraftModel implements Drafting {
 
     private final Session session;
     private final ObjectProperty<Tool> tool = new SimpleObjectProperty<>(Tool.SELECT);
@@ -42,9 +44,9 @@ public final class DraftModel {
         this.session = session;
         session.transectName().addListener((name, before, after) -> after.ifPresent(this::rename));
         session.demand().addListener((demand, before, after) -> {
-            if (after == Session.Demand.DRAW_PRISM) {
+            if (after == Session.Demand.DRAW_PRISM || after == Session.Demand.DRAW_SECTION) {
                 session.demand().set(Session.Demand.NONE);
-                choose(Tool.POLYGON);
+                choose(after == Session.Demand.DRAW_PRISM ? Tool.POLYGON : Tool.SECTION);
             } else if (after == Session.Demand.DRAW_TRANSECT) {
                 session.demand().set(Session.Demand.NONE);
                 choose(Tool.TRANSECT);
@@ -85,13 +87,14 @@ public final class DraftModel {
     }
 
     private void publish(boolean settled) {
-        int layers =
-                session.set().get().map(set -> set.aquifer().layers().size()).orElse(1);
+        List<Layer> layers =
+                session.set().get().map(set -> set.aquifer().layers()).orElse(List.of());
         session.drawing()
                 .set(new org.seepledger.desktop.session.Drawing(
                         session.drawing().get().revision() + 1,
                         history.current().shapes().stream()
-                                .map(shape -> shape.prism(layers, (surface, lid) -> surfaces.get(surface)))
+                                .map(shape -> shape.prism(
+                                        Math.max(1, layers.size()), (limit, lid) -> surface(layers, limit, lid)))
                                 .toList(),
                         settled));
         publishLines(settled);
@@ -127,17 +130,15 @@ public final class DraftModel {
         return drawing().line(session.transect().get());
     }
 
+    private GriddedValues surface(List<Layer> layers, Limit limit, String lid) {
+        return limit instanceof Limit.Layer layer ? layer.among(layers, lid) : surfaces.get(limit);
+    }
+
     private void tellShapes() {
         session.shapes().set(new DrawnShapes(history.settled(), !isUnsaved()));
     }
 
-    /**
-     * Takes a step at once, or tells in the status line why it is refused.
-     *
-     * @param name the key of the step's name
-     * @param change makes the next drawing
-     * @return whether it was taken
-     */
+    @Override
     public boolean step(String name, UnaryOperator<Drawing> change) {
         return tried(() -> {
             history.step(Words.of(name), change.apply(history.current()));
@@ -145,29 +146,33 @@ public final class DraftModel {
         });
     }
 
-    void beginGesture(String name) {
+    @Override
+    public void beginGesture(String name) {
         history.begin(Words.of(name));
     }
 
-    /** Shows what a gesture would do; what is refused leaves the last preview. */
-    void preview(UnaryOperator<Drawing> change) {
+    @Override
+    public void preview(UnaryOperator<Drawing> change) {
         tried(() -> {
             history.preview(change.apply(history.settled()));
             publish(false);
         });
     }
 
-    void commitGesture() {
+    @Override
+    public void commitGesture() {
         history.commit();
         publish(true);
     }
 
-    void cancelGesture() {
+    @Override
+    public void cancelGesture() {
         history.cancel();
         publish(true);
     }
 
-    boolean isGesturing() {
+    @Override
+    public boolean isGesturing() {
         return history.isGesturing();
     }
 
@@ -233,7 +238,7 @@ public final class DraftModel {
         return history.settled();
     }
 
-    /** {@return the selected shape, if there is one} */
+    @Override
     public Optional<Shape> selected() {
         return history.current().find(session.selected().get());
     }

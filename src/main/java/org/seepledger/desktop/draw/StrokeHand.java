@@ -3,14 +3,16 @@ package org.seepledger.desktop.draw;
 import java.util.List;
 import java.util.Optional;
 import org.seepledger.desktop.map.Touch;
+import org.seepledger.picture.SectionLine;
 import org.seepledger.sketch.Drawing;
 import org.seepledger.sketch.Nearness;
 import org.seepledger.sketch.Place;
+import org.seepledger.sketch.Refusal;
 import org.seepledger.sketch.Shape;
 import org.seepledger.sketch.Snapping;
 import org.seepledger.sketch.Stroke;
 
-/** Draws place by place: a new prism, an island, the line that cuts a prism, or a transect. */
+/** Draws place by place: a new prism, an island, the line that cuts a prism, that of a section, or a transect. */
 final class StrokeHand {
 
     private final DraftModel model;
@@ -31,9 +33,9 @@ final class StrokeHand {
     void press(Touch touch) {
         hover(touch);
         Place place = pointer.orElseThrow();
-        boolean onFirst = stroke.places().size() > 2
-                && model.tool().get() != Tool.SPLIT
-                && !isTransect()
+        boolean closes = model.tool().get() == Tool.POLYGON || model.tool().get() == Tool.ISLAND;
+        boolean onFirst = closes
+                && stroke.places().size() > 2
                 && stroke.places().get(0).distance(new Place(touch.x(), touch.y()))
                         <= Nearness.ofPixel(touch.pixel()).vertex();
         if (onFirst) {
@@ -70,6 +72,7 @@ final class StrokeHand {
                                 "step.split", drawing -> drawing.split(shape.name(), stroke.places(), model.near())))
                         .orElse(false);
             case TRANSECT -> Fresh.transect(model, stroke.places());
+            case SECTION -> section();
             default -> draw();
         };
         if (done) {
@@ -88,6 +91,17 @@ final class StrokeHand {
 
     private boolean draw() {
         return Fresh.prism(model, "step.polygon", stroke::closed);
+    }
+
+    private boolean section() {
+        try {
+            SectionLine line = new SectionLine(stroke.places());
+            model.session().sectionLine().set(Optional.of(line));
+            return true;
+        } catch (Refusal refusal) {
+            model.session().status().set(refusal.getMessage());
+            return false;
+        }
     }
 
     List<Place> places() {

@@ -18,6 +18,9 @@ public enum Tool {
     SPLIT("X"),
     /** Makes the selected prism and another one. */
     MERGE("M"),
+    /** Draws the line of the section. */
+    SECTION("A"),
+
     /** Draws a transect vertex by vertex; of sets with solutes alone. */
     TRANSECT("D");
 

@@ -15,6 +15,7 @@ import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.task.PaneState;
+import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.job.RecordBudget;
 import org.seepledger.ledger.ExchangeFlow;
@@ -90,18 +91,20 @@ public final class ExchangeModel {
                 .flatMap(set -> live.whole().get().map(record -> {
                     Period period = reading.period(set, session.interval().get());
                     return ExchangeDiagram.of(
-                            names(record),
-                            record.balance().exchange(),
-                            period,
-                            reading.shown(set),
-                            Math.max(320, width));
+                                    names(record),
+                                    record.balance().exchange(),
+                                    period,
+                                    reading.shown(set),
+                                    Math.max(320, width))
+                            .written(session.numbers().get()::label);
                 }));
     }
 
     /** Copies the matrix with its unit, in full precision. */
     public void copy() {
         matrix.ifPresent(shown -> {
-            copies.table(shown.tabSeparated(belongs.get()), shown.html(belongs.get()));
+            String title = belongs(NumberForm.SPACE_POINT);
+            copies.table(shown.tabSeparated(title), shown.html(title));
             session.notices().done(Words.of("exchange.copied"));
         });
     }
@@ -114,15 +117,34 @@ public final class ExchangeModel {
         Optional<OpenSet> set = session.set().get();
         Optional<RecordBudget> record = live.whole().get();
         matrix = set.flatMap(open -> record.map(known -> matrix(open, known)));
-        belongs.set(set.filter(open -> record.isPresent())
+        belongs.set(belongs(session.numbers().get()));
+        changes.set(changes.get() + 1);
+    }
+
+    private String belongs(NumberForm form) {
+        Optional<RecordBudget> record = live.whole().get();
+        return session.set()
+                .get()
+                .filter(open -> record.isPresent())
                 .map(open -> Words.of(
                         "exchange.belongs",
                         record.get().prisms().size(),
                         PeriodWords.of(
                                 reading.period(open, session.interval().get()),
-                                open.aquifer().times())))
-                .orElse(""));
-        changes.set(changes.get() + 1);
+                                open.aquifer().times(),
+                                form)))
+                .orElse("");
+    }
+
+    /**
+     * {@return a flow of the matrix as it is to be read; nothing where the two do not touch}
+     *
+     * @param shown the matrix
+     * @param giver the place of who gives
+     * @param receiver the place of who receives
+     */
+    public String text(Matrix shown, int giver, int receiver) {
+        return session.numbers().get().of(shown.text(giver, receiver));
     }
 
     private Matrix matrix(OpenSet set, RecordBudget record) {

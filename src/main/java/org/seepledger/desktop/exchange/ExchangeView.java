@@ -76,7 +76,7 @@ public final class ExchangeView extends BorderPane {
             matrix.add(end(styled(flows.names().get(i), "sl-matrix-head")), i + 1, 0);
             matrix.add(styled(flows.names().get(i), "sl-matrix-head"), 0, i + 1);
             for (int receiver = 0; receiver < count; receiver++) {
-                matrix.add(end(styled(flows.text(i, receiver), "sl-figure")), receiver + 1, i + 1);
+                matrix.add(end(styled(model.text(flows, i, receiver), "sl-figure")), receiver + 1, i + 1);
             }
         }
     }

@@ -50,6 +50,7 @@ public final class Folio {
     private final BorderPane pages = new BorderPane();
     private final ToggleGroup chosen = new ToggleGroup();
     private final HBox marks = new HBox();
+    private final Reading reading;
     private final LiveBudget live;
     private final LivePlume plumes;
     private final Session session;
@@ -57,7 +58,7 @@ public final class Folio {
     private final ToggleButton transectsMark;
     private final LedgerModel ledger;
     private final TransectModel transects;
-    private final Node ribbon;
+    private final ChartView ribbon;
 
     /**
      * Builds the panes.
@@ -70,7 +71,7 @@ public final class Folio {
      */
     public Folio(Session session, Tasks tasks, FileDialogs dialogs, CopyBoard copies, ObservableValue<Theme> theme) {
         this.session = session;
-        Reading reading = new Reading(session);
+        this.reading = new Reading(session);
         this.live = new LiveBudget(session, tasks);
         new FaceFeed(session, live, reading).begin();
         SoluteLook look = new SoluteLook(session);
@@ -158,8 +159,13 @@ public final class Folio {
     }
 
     /** {@return the ribbon of time} */
-    public Node ribbon() {
-        return ribbon;
+    public Shelf.Page ribbon() {
+        return new Shelf.Page("shelf.time", ribbon.bar(), ribbon);
+    }
+
+    /** {@return how figures are read} */
+    public Reading reading() {
+        return reading;
     }
 
     /** Works out again what was stopped or failed. */

@@ -1,5 +1,6 @@
 package org.seepledger.desktop.intake;
 
+import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.time.Duration;
 import java.util.ArrayList;
@@ -7,6 +8,7 @@ import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import java.util.function.BiConsumer;
 import java.util.function.Consumer;
 import java.util.function.UnaryOperator;
 import javafx.beans.property.BooleanProperty;
@@ -31,9 +33,11 @@ import org.seepledger.intake.Plan;
 import org.seepledger.intake.Proposal;
 import org.seepledger.intake.Use;
 import org.seepledger.intake.Wishes;
+import org.seepledger.job.Inspection;
 import org.seepledger.job.IntakeJob;
 import org.seepledger.job.RasterPreview;
 import org.seepledger.progress.Cancelled;
+import org.seepledger.progress.Progress;
 
 /** Loose files, what they are taken for, and the aquifer folder that they make. */
 public final class IntakeModel {
@@ -62,11 +66,11 @@ public final class IntakeModel {
      * What the check says.
      *
      * @param state how it stands
-     * @param text what {@code inspect} says; empty as long as it has not said it
+     * @param says what {@code inspect} says; empty as long as it has not said it
      */
-    record Check(PaneState state, String text) {
+    record Check(PaneState state, Optional<Inspection> says) {
 
-        static final Check NONE = new Check(PaneState.READY, "");
+        static final Check NONE = new Check(PaneState.READY, Optional.empty());
     }
 
     /**
@@ -205,27 +209,29 @@ public final class IntakeModel {
                     return Made.of(next);
                 },
                 this::take,
-                fault -> check.set(new Check(PaneState.failed(FaultWords.of(fault)), "")));
+                fault -> check.set(new Check(PaneState.failed(FaultWords.of(fault)), Optional.empty())));
     }
 
     private void take(Made next) {
         made.set(Optional.of(next));
         Composition copied = next.copied();
         if (!copied.isSound()) {
-            check.set(new Check(PaneState.empty(Words.of("intake.check.waits")), ""));
+            check.set(new Check(PaneState.empty(Words.of("intake.check.waits")), Optional.empty()));
             return;
         }
         check.set(new Check(
-                PaneState.working(Words.of("intake.checking")), check.get().text()));
+                PaneState.working(Words.of("intake.checking")), check.get().says()));
         int threads = Math.max(1, Runtime.getRuntime().availableProcessors() - 1);
         checking.run(
                 progress -> {
                     EntryGuard.enter();
                     return IntakeJob.check(copied, threads, progress);
                 },
-                text -> check.set(new Check(PaneState.READY, text)),
+                says -> check.set(new Check(PaneState.READY, Optional.of(says))),
                 fault -> check.set(
-                        isStopped(fault) ? Check.NONE : new Check(PaneState.failed(FaultWords.of(fault)), "")));
+                        isStopped(fault)
+                                ? Check.NONE
+                                : new Check(PaneState.failed(FaultWords.of(fault)), Optional.empty())));
     }
 
     private static boolean isStopped(Throwable fault) {
@@ -308,53 +314,62 @@ public final class IntakeModel {
 
     /** Asks for a folder in which the new one is to be. */
     void chooseTarget() {
+        Path name = targetFolder().map(Path::getFileName).orElse(Path.of("aquifer"));
         dialogs.folder(Words.of("intake.target"))
-                .ifPresent(folder -> target.set(
-                        folder.resolve(Path.of(target.get()).getFileName()).toString()));
+                .ifPresent(folder -> target.set(folder.resolve(name).toString()));
+    }
+
+    /** Where the new folder is to be, if that can be the name of a folder. */
+    private Optional<Path> targetFolder() {
+        try {
+            Path path = Path.of(target.get().strip());
+            boolean named = path.getFileName() != null && !path.toString().isEmpty();
+            return named ? Optional.of(path.toAbsolutePath().normalize()) : Optional.empty();
+        } catch (InvalidPathException e) {
+            return Optional.empty();
+        }
     }
 
     /** Writes the new folder and opens it. */
     void write() {
-        Path folder = Path.of(target.get());
+        Optional<Path> wanted = targetFolder();
+        if (wanted.isEmpty()) {
+            written.set(PaneState.failed(Words.of("intake.target.none")));
+            return;
+        }
+        Path folder = wanted.get();
         made.get()
                 .filter(now -> now.copied().isSound())
-                .ifPresent(now -> write(Words.of("intake.writing", folder), folder, threads -> progress -> {
-                    IntakeJob.write(now.copied(), folder, threads, progress);
-                    return folder;
-                }));
+                .ifPresent(now -> write(
+                        Words.of("intake.writing", folder),
+                        folder,
+                        (threads, progress) -> IntakeJob.write(now.copied(), folder, threads, progress)));
     }
 
     /** Writes the description of files where they lie, and opens their folder. */
     void describe() {
         made.get().filter(now -> now.placed().isSound()).ifPresent(now -> {
             Path root = now.plan().root();
-            write(Words.of("intake.writing", root), root, threads -> progress -> {
-                IntakeJob.describe(now.placed(), root, threads, progress);
-                return root;
-            });
+            write(
+                    Words.of("intake.writing", root),
+                    root,
+                    (threads, progress) -> IntakeJob.describe(now.placed(), root, threads, progress));
         });
     }
 
-    /** Makes the work of writing. */
-    @FunctionalInterface
-    private interface Writing {
-
-        org.seepledger.desktop.task.Work<Path> with(int threads);
-    }
-
-    private void write(String words, Path folder, Writing work) {
+    private void write(String words, Path folder, BiConsumer<Integer, Progress> work) {
         written.set(PaneState.working(words));
-        org.seepledger.desktop.task.Work<Path> write =
-                work.with(Math.max(1, Runtime.getRuntime().availableProcessors() - 1));
+        int threads = Math.max(1, Runtime.getRuntime().availableProcessors() - 1);
         writing.run(
                 progress -> {
                     EntryGuard.enter();
-                    return write.call(progress);
+                    work.accept(threads, progress);
+                    return folder;
                 },
                 done -> {
                     written.set(PaneState.READY);
                     shown.set(false);
-                    open.accept(folder);
+                    open.accept(done);
                 },
                 fault -> written.set(isStopped(fault) ? PaneState.READY : PaneState.failed(FaultWords.of(fault))));
     }

@@ -8,7 +8,6 @@ import java.util.stream.Collectors;
 import org.seepledger.desktop.intake.ItemRow.Mark;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.intake.Finding;
-import org.seepledger.intake.Guess;
 import org.seepledger.intake.Item;
 import org.seepledger.intake.Plan;
 import org.seepledger.intake.Role;
@@ -72,9 +71,7 @@ final class ItemRows {
         if (!item.isUsed()) {
             return worst == Mark.FINE ? Mark.UNUSED : worst;
         }
-        boolean weak = item.uses().stream()
-                .anyMatch(use -> use.role() != Role.NONE && use.guess().confidence() == Guess.Confidence.LOW);
-        return worst == Mark.FINE && weak ? Mark.DOUBT : worst;
+        return worst;
     }
 
     private static String lead(Item item) {

@@ -1,6 +1,8 @@
 package org.seepledger.desktop.intake;
 
+import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.function.Consumer;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
@@ -15,6 +17,7 @@ import org.seepledger.desktop.task.PaneState;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.intake.Composition;
 import org.seepledger.intake.Finding;
+import org.seepledger.job.Inspection;
 
 /** What the files make: what stands in the way, what the check says, and the writing. */
 final class OutcomePane extends VBox {
@@ -99,11 +102,12 @@ final class OutcomePane extends VBox {
         if (failed) {
             verdict.getStyleClass().add("sl-fault");
         }
-        checked.setText(model.check().get().text());
-        boolean told = !model.check().get().text().isEmpty();
+        Optional<Inspection> says = model.check().get().says();
+        checked.setText(says.map(Inspection::text).orElse(""));
+        boolean told = says.isPresent();
         checked.setVisible(told);
         checked.setManaged(told);
-        findings.show(model.made().get().map(now -> now.copied().findings()).orElse(List.of()));
+        findings.show(findings());
         verdict.setText(model.made().get().map(this::verdict).orElse(""));
         model.made().get().ifPresent(this::showWriting);
         PaneState state = model.written().get();
@@ -130,6 +134,19 @@ final class OutcomePane extends VBox {
                         .map(Made::placed)
                         .filter(Composition::isSound)
                         .isEmpty());
+    }
+
+    /** What stands in the way, and what the check warns of. */
+    private List<Finding> findings() {
+        List<Finding> all = new ArrayList<>(
+                model.made().get().map(now -> now.copied().findings()).orElse(List.of()));
+        model.check()
+                .get()
+                .says()
+                .ifPresent(says -> says.warnings()
+                        .forEach(words ->
+                                all.add(new Finding(Finding.Level.DOUBT, Optional.empty(), Optional.empty(), words))));
+        return all;
     }
 
     private String verdict(Made made) {

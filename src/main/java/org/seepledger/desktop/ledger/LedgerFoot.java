@@ -49,11 +49,11 @@ final class LedgerFoot extends GridPane {
         Label name = new Label(row.label());
         name.getStyleClass().add("sl-muted");
         name.setMinWidth(USE_PREF_SIZE);
-        Label figure = new Label(row.text(row.net()));
+        Label figure = new Label(model.text(row, row.net()));
         figure.getStyleClass().addAll("sl-figure", "sl-strong");
         figure.setMinWidth(USE_PREF_SIZE);
         if (!Double.isNaN(row.low())) {
-            String bracket = Words.of("ledger.bracket", row.text(row.low()), row.text(row.high()));
+            String bracket = Words.of("ledger.bracket", model.text(row, row.low()), model.text(row, row.high()));
             figure.setTooltip(new Tooltip(bracket));
         }
         add(name, place / HIGH * 2, place % HIGH);

@@ -21,6 +21,7 @@ import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.solute.LivePlume;
 import org.seepledger.desktop.solute.MassReading;
 import org.seepledger.desktop.task.PaneState;
+import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.desktop.words.Words;
 
 /** The ledger of the selected prism: its rows, which geometry and time they belong to, and which face is lit up. */
@@ -41,6 +42,7 @@ public final class LedgerModel {
     private final ObjectProperty<Optional<LedgerRow>> chosen = new SimpleObjectProperty<>(Optional.empty());
     private double largest;
     private String whose = "";
+    private String copyTitle = "";
 
     /**
      * Makes the model.
@@ -176,9 +178,7 @@ public final class LedgerModel {
     /** Copies the rows with their units, in full precision. */
     public void copy() {
         if (!rows.isEmpty() && !belongs.get().isEmpty()) {
-            new LedgerCopy(belongs.get(), unit.get(), massUnit.get(), rows)
-                    .table()
-                    .on(copies);
+            new LedgerCopy(copyTitle, unit.get(), massUnit.get(), rows).table().on(copies);
             session.notices().done(Words.of("ledger.copied", belongs.get()));
         }
     }
@@ -190,6 +190,16 @@ public final class LedgerModel {
      */
     public double share(double value) {
         return largest == 0 || Double.isNaN(value) ? 0 : value / largest;
+    }
+
+    /**
+     * {@return a number of a row, as it is to be read}
+     *
+     * @param row the row
+     * @param value the number
+     */
+    public String text(LedgerRow row, double value) {
+        return session.numbers().get().of(row.text(value));
     }
 
     private void show() {
@@ -216,13 +226,18 @@ public final class LedgerModel {
                 .orElse(0);
         unit.set(sheet.unitName());
         massUnit.set(sheet.ofSolute().map(LedgerSheet.OfSolute::massUnit).orElse(""));
-        closure.set(sheet.ofSolute().map(LedgerSheet.OfSolute::closure).orElse(""));
-        String geometry = sheet.shown().whose(set);
-        whose = sheets.ofSolute()
-                ? Words.of("ledger.of.solute", session.solute().get(), geometry)
-                : geometry;
+        closure.set(session.numbers()
+                .get()
+                .of(sheet.ofSolute().map(LedgerSheet.OfSolute::closure).orElse("")));
+        whose = whose(set, sheet, session.numbers().get());
+        copyTitle = whose(set, sheet, NumberForm.SPACE_POINT);
         notes.set(String.join(" ", sheet.shown().notes()));
         rows.setAll(arranged);
+    }
+
+    private String whose(OpenSet set, LedgerSheet sheet, NumberForm form) {
+        String geometry = sheet.shown().whose(set, form);
+        return sheets.ofSolute() ? Words.of("ledger.of.solute", session.solute().get(), geometry) : geometry;
     }
 
     private void clear() {

@@ -87,9 +87,7 @@ public final class LedgerView extends BorderPane {
     private void fit(String solute) {
         boolean ofWater = solute.isEmpty();
         table.setColumnResizePolicy(
-                ofWater
-                        ? TableView.CONSTRAINED_RESIZE_POLICY_FLEX_LAST_COLUMN
-                        : TableView.UNCONSTRAINED_RESIZE_POLICY);
+                ofWater ? TableView.CONSTRAINED_RESIZE_POLICY_FLEX_LAST_COLUMN : TableView.UNCONSTRAINED_RESIZE_POLICY);
         table.getColumns().get(0).setPrefWidth(ofWater ? NAME : SHORT_NAME);
         table.getColumns().stream()
                 .filter(column -> column.getStyleClass().contains("sl-numbers"))
@@ -124,7 +122,7 @@ public final class LedgerView extends BorderPane {
         column.getStyleClass().add("sl-numbers");
         column.setMinWidth(84);
         column.setPrefWidth(NUMBER);
-        return shown(column, new NumberCell.Factory(value));
+        return shown(column, new NumberCell.Factory(value, model));
     }
 
     /** The net with non-detects as something else; of solutes alone. */
@@ -137,7 +135,7 @@ public final class LedgerView extends BorderPane {
         column.getStyleClass().add("sl-numbers");
         column.setMinWidth(NUMBER);
         column.visibleProperty().bind(model.solute().isNotEmpty());
-        return shown(column, new NumberCell.Factory(value));
+        return shown(column, new NumberCell.Factory(value, model));
     }
 
     private TableColumn<LedgerRow, LedgerRow> scaleColumn() {

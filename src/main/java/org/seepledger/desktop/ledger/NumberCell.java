@@ -9,22 +9,24 @@ import javafx.util.Callback;
 final class NumberCell extends TableCell<LedgerRow, LedgerRow> {
 
     private final Value value;
+    private final LedgerModel model;
 
     /** Which number. */
     @FunctionalInterface
     interface Value extends ToDoubleFunction<LedgerRow> {}
 
     /** Makes these cells. */
-    record Factory(Value value)
+    record Factory(Value value, LedgerModel model)
             implements Callback<TableColumn<LedgerRow, LedgerRow>, TableCell<LedgerRow, LedgerRow>> {
 
         @Override
         public TableCell<LedgerRow, LedgerRow> call(TableColumn<LedgerRow, LedgerRow> column) {
-            return new NumberCell(value);
+            return new NumberCell(value, model);
         }
     }
 
-    private NumberCell(Value value) {
+    private NumberCell(Value value, LedgerModel model) {
+        this.model = model;
         this.value = value;
         getStyleClass().add("sl-figure");
     }
@@ -32,6 +34,6 @@ final class NumberCell extends TableCell<LedgerRow, LedgerRow> {
     @Override
     protected void updateItem(LedgerRow row, boolean empty) {
         super.updateItem(row, empty);
-        setText(empty || row == null ? "" : row.text(value.applyAsDouble(row)));
+        setText(empty || row == null ? "" : model.text(row, value.applyAsDouble(row)));
     }
 }

@@ -2,8 +2,10 @@ package org.seepledger.desktop.map;
 
 import java.nio.file.Path;
 import java.util.Optional;
+import javafx.beans.property.DoubleProperty;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
+import javafx.beans.property.SimpleDoubleProperty;
 import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
@@ -19,9 +21,12 @@ public final class GroundModel {
 
     private static final FileDialogs.Kind GEOTIFF = new FileDialogs.Kind("GeoTIFF", "*.tif");
 
+    private static final double USUAL_COVER = 0.6;
+
     private final Session session;
     private final FileDialogs dialogs;
     private final Lane reading;
+    private final DoubleProperty cover = new SimpleDoubleProperty(USUAL_COVER);
     private final ReadOnlyObjectWrapper<Optional<GroundPicture>> picture =
             new ReadOnlyObjectWrapper<>(Optional.empty());
 
@@ -64,6 +69,11 @@ public final class GroundModel {
     public void clear() {
         reading.cancel();
         picture.set(Optional.empty());
+    }
+
+    /** {@return how much of the picture the values over it cover, from 0 to 1} */
+    public DoubleProperty cover() {
+        return cover;
     }
 
     /** {@return the picture} */

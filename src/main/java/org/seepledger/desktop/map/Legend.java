@@ -4,7 +4,6 @@ import java.util.List;
 import java.util.Optional;
 import javafx.beans.value.ObservableValue;
 import javafx.geometry.Pos;
-import javafx.scene.canvas.Canvas;
 import javafx.scene.canvas.GraphicsContext;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
@@ -16,7 +15,9 @@ import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 import org.seepledger.desktop.paint.MarkPainter;
+import org.seepledger.desktop.paint.SharpCanvas;
 import org.seepledger.desktop.theme.Theme;
+import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.job.MapQuantity;
 import org.seepledger.picture.Ink;
@@ -34,7 +35,7 @@ final class Legend extends VBox {
     private final ValuesModel model;
     private final ObservableValue<Theme> theme;
     private final Button title = new Button();
-    private final Canvas bar = new Canvas(WIDTH, BAR + 16);
+    private final SharpCanvas bar = new SharpCanvas(this::show);
     private final TextField from = field("range-from");
     private final TextField to = field("range-to");
     private final HBox ends = new HBox(5);
@@ -44,6 +45,7 @@ final class Legend extends VBox {
         this.theme = theme;
         setId("legend");
         getStyleClass().addAll("sl-float", "sl-legend");
+        bar.size(WIDTH, BAR + 16);
         title.setId("legend-title");
         title.getStyleClass().setAll("sl-legend-title");
         title.setTooltip(new Tooltip(Words.of("action.legend")));
@@ -74,6 +76,7 @@ final class Legend extends VBox {
         model.scale().addListener((scale, before, after) -> show());
         model.view().addListener((view, before, after) -> show());
         theme.addListener((lit, before, after) -> show());
+        model.numbers().addListener((form, before, after) -> show());
         show();
     }
 
@@ -114,7 +117,7 @@ final class Legend extends VBox {
         if (scale.isEmpty()) {
             return;
         }
-        String[] now = {text(scale.get().from()), text(scale.get().to())};
+        String[] now = {shown(scale.get().from()), shown(scale.get().to())};
         if (from.getText().equals(now[0]) && to.getText().equals(now[1])) {
             return;
         }
@@ -125,7 +128,7 @@ final class Legend extends VBox {
 
     private static double number(String text) {
         try {
-            return Double.parseDouble(text.strip().replace('−', '-').replace(',', '.'));
+            return Double.parseDouble(NumberForm.plain(text));
         } catch (NumberFormatException e) {
             return Double.NaN;
         }
@@ -140,20 +143,24 @@ final class Legend extends VBox {
         return text.length() > 9 ? String.format(java.util.Locale.ROOT, "%.3e", value) : text;
     }
 
+    private String shown(double value) {
+        return model.numbers().get().of(text(value));
+    }
+
     private void show() {
         Optional<ValueScale> scale = model.scale().get();
         setVisible(scale.isPresent() && model.view().get().isPresent());
         if (isVisible()) {
             MapQuantity quantity = model.view().get().orElseThrow().request().quantity();
             title.setText(Words.of("map.legend", quantity.label(), quantity.unit()));
-            from.setText(text(scale.get().from()));
-            to.setText(text(scale.get().to()));
+            from.setText(shown(scale.get().from()));
+            to.setText(shown(scale.get().to()));
             paint(scale.get());
         }
     }
 
     private void paint(ValueScale scale) {
-        GraphicsContext canvas = bar.getGraphicsContext2D();
+        GraphicsContext canvas = bar.context();
         canvas.clearRect(0, 0, bar.getWidth(), bar.getHeight());
         MarkPainter painter = new MarkPainter(canvas, theme.getValue());
         double length = WIDTH - 2 * SIDE;
@@ -169,7 +176,7 @@ final class Legend extends VBox {
             double[] tick = {x, BAR, x, BAR + 4};
             painter.paint(List.of(
                     new Mark.Line(tick, Mark.Stroke.of(Ink.Token.MUTED, 1)),
-                    Mark.Text.of(x, BAR + 15, ticks.label(i), 11, Mark.Anchor.MIDDLE)
+                    Mark.Text.of(x, BAR + 15, model.numbers().get().of(ticks.label(i)), 11, Mark.Anchor.MIDDLE)
                             .in(Ink.Token.MUTED)));
         }
     }

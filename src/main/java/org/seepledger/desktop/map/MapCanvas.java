@@ -5,15 +5,16 @@ import java.util.List;
 import java.util.Optional;
 import javafx.beans.Observable;
 import javafx.beans.value.ObservableValue;
-import javafx.scene.canvas.Canvas;
 import javafx.scene.canvas.GraphicsContext;
 import javafx.scene.layout.Region;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.desktop.paint.MarkPainter;
+import org.seepledger.desktop.paint.SharpCanvas;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.theme.Theme;
+import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.job.GroundPicture;
 import org.seepledger.picture.Ink;
 import org.seepledger.picture.Mark;
@@ -22,9 +23,6 @@ import org.seepledger.picture.ScaleBar;
 /** Paints the map, once per frame at most: the ground on one canvas, prisms and letters on another over it. */
 final class MapCanvas extends Region {
 
-    /** How much of a picture the values over it cover. */
-    private static final double OVER_PICTURE = 0.6;
-
     private static final double CORNER = 18;
     private static final double LONGEST_BAR = 170;
 
@@ -32,8 +30,8 @@ final class MapCanvas extends Region {
     private final GroundModel under;
     private final GroundPainter groundPainter = new GroundPainter();
     private final ObservableValue<Theme> theme;
-    private final Canvas ground = new Canvas();
-    private final Canvas above = new Canvas();
+    private final SharpCanvas ground = new SharpCanvas(this::repaintGround);
+    private final SharpCanvas above = new SharpCanvas(this::repaint);
     private final Tiles tiles;
     private final List<MarkSource> guests = new ArrayList<>();
     private boolean groundStale = true;
@@ -52,6 +50,7 @@ final class MapCanvas extends Region {
         Session session = model.session();
         Observable[] causes = {
             under.picture(),
+            under.cover(),
             model.camera(),
             model.values().view(),
             model.values().scale(),
@@ -68,7 +67,10 @@ final class MapCanvas extends Region {
             session.marked(),
             session.faceFlows(),
             session.wells(),
-            model.overlays().wells()
+            session.sectionLine(),
+            session.along(),
+            model.overlays().wells(),
+            session.numbers()
         };
         for (Observable cause : causes) {
             cause.addListener(changed -> repaintGround());
@@ -103,10 +105,8 @@ final class MapCanvas extends Region {
         double width = Math.floor(getWidth());
         double height = Math.floor(getHeight());
         if (width != ground.getWidth() || height != ground.getHeight()) {
-            for (Canvas canvas : List.of(ground, above)) {
-                canvas.setWidth(width);
-                canvas.setHeight(height);
-            }
+            ground.size(width, height);
+            above.size(width, height);
             model.resize(width, height);
             groundStale = true;
         }
@@ -118,13 +118,14 @@ final class MapCanvas extends Region {
     }
 
     private double outputScale() {
-        return getScene() == null || getScene().getWindow() == null
+        double screen = getScene() == null || getScene().getWindow() == null
                 ? 1
                 : getScene().getWindow().getOutputScaleX();
+        return screen * ground.sharpness();
     }
 
     private void paintGround() {
-        GraphicsContext canvas = ground.getGraphicsContext2D();
+        GraphicsContext canvas = ground.context();
         canvas.clearRect(0, 0, ground.getWidth(), ground.getHeight());
         if (model.session().set().get().isEmpty()) {
             return;
@@ -133,7 +134,7 @@ final class MapCanvas extends Region {
         Camera camera = model.camera().get();
         Optional<GroundPicture> picture = under.picture().get();
         groundPainter.paint(canvas, camera, picture);
-        double opacity = picture.isPresent() ? OVER_PICTURE : 1;
+        double opacity = picture.isPresent() ? under.cover().get() : 1;
         tiles.wear(model.values().view().get(), model.values().scale().get(), opacity);
         tiles.pyramid().ifPresent(pyramid -> new TilePainter(canvas, camera, outputScale(), tiles, pyramid).paint());
         MarkPainter painter = new MarkPainter(canvas, theme.getValue());
@@ -166,7 +167,7 @@ final class MapCanvas extends Region {
     }
 
     private void paintAbove() {
-        GraphicsContext canvas = above.getGraphicsContext2D();
+        GraphicsContext canvas = above.context();
         canvas.clearRect(0, 0, above.getWidth(), above.getHeight());
         if (model.session().set().get().isEmpty()) {
             return;
@@ -176,10 +177,16 @@ final class MapCanvas extends Region {
         MarkPainter painter = new MarkPainter(canvas, theme.getValue());
         painter.paint(Outlines.of(model.session(), camera));
         painter.paint(MarkedCells.of(model.session().marked().get(), aquifer.grid(), camera));
-        painter.paint(Lettering.of(model));
+        painter.paint(written(Lettering.of(model)));
+        painter.paint(SectionTrace.of(model.session(), camera));
         guests.forEach(guest -> painter.paint(guest.marks(camera)));
         double scale = camera.scale() / aquifer.grid().planUnit();
-        painter.paint(ScaleBar.within(scale, aquifer.lengthUnit().toString(), LONGEST_BAR)
-                .marks(CORNER, camera.height() - CORNER - ScaleBar.HEIGHT));
+        painter.paint(written(ScaleBar.within(scale, aquifer.lengthUnit().toString(), LONGEST_BAR)
+                .marks(CORNER, camera.height() - CORNER - ScaleBar.HEIGHT)));
+    }
+
+    private List<Mark> written(List<? extends Mark> marks) {
+        NumberForm form = model.session().numbers().get();
+        return marks.stream().map(mark -> mark.written(form::label)).toList();
     }
 }

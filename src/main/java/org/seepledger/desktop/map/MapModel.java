@@ -2,6 +2,7 @@ package org.seepledger.desktop.map;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
@@ -56,6 +57,7 @@ public final class MapModel {
         });
         session.interval().addListener((interval, before, after) -> findWells());
         session.target().addListener((target, before, after) -> after.ifPresent(this::goTo));
+        new MapOffer(session, this).begin();
     }
 
     /** Puts a cell into the middle, near enough to be seen among its neighbours. */
@@ -168,6 +170,7 @@ public final class MapModel {
      */
     public void point(double x, double y) {
         Camera seen = camera.get();
+        session.along().set(SectionTrace.along(session.sectionLine().get(), seen, x, y));
         readout.set(session.set()
                 .get()
                 .map(set -> Readout.at(
@@ -175,12 +178,14 @@ public final class MapModel {
                         seen.mapX(x),
                         seen.mapY(y),
                         session.layer().get(),
-                        values.view().get())));
+                        values.view().get(),
+                        session.numbers().get())));
     }
 
     /** The cursor has left. */
     public void leave() {
         readout.set(Optional.empty());
+        session.along().set(OptionalDouble.empty());
     }
 
     /** {@return what the window looks at} */

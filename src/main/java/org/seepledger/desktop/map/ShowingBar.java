@@ -13,6 +13,7 @@ import javafx.util.StringConverter;
 import org.seepledger.aquifer.Times;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
+import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.job.MapQuantity;
 import org.seepledger.unit.Figures;
@@ -56,6 +57,7 @@ public final class ShowingBar extends HBox {
         session.set().addListener((set, before, after) -> describe());
         session.layer().addListener((chosen, before, after) -> describe());
         session.interval().addListener((chosen, before, after) -> describe());
+        session.numbers().addListener((form, before, after) -> describe());
         getChildren()
                 .addAll(
                         muted("map.showing"),
@@ -119,19 +121,22 @@ public final class ShowingBar extends HBox {
                         shownLayer + 1,
                         open.aquifer().layers().get(shownLayer).name()))
                 .orElse(""));
-        interval.setText(
-                set.map(open -> interval(open.aquifer().times(), shownInterval)).orElse(""));
+        interval.setText(set.map(open -> interval(
+                        open.aquifer().times(),
+                        shownInterval,
+                        model.session().numbers().get()))
+                .orElse(""));
         layer.setMinWidth(USE_PREF_SIZE);
         interval.setMinWidth(USE_PREF_SIZE);
     }
 
-    static String interval(Times times, int interval) {
+    static String interval(Times times, int interval, NumberForm form) {
         String from = times.date(times.instant(interval))
                 .map(ShowingBar::day)
-                .orElse(Figures.typeset(times.instant(interval)));
+                .orElse(form.of(Figures.typeset(times.instant(interval))));
         String to = times.date(times.instant(interval + 1))
                 .map(ShowingBar::day)
-                .orElse(Figures.typeset(times.instant(interval + 1)) + "\u00a0" + times.unit());
+                .orElse(form.of(Figures.typeset(times.instant(interval + 1))) + "\u00a0" + times.unit());
         return Words.of("map.interval", interval + 1, times.intervals(), from, to);
     }
 

@@ -11,6 +11,7 @@ import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.beans.property.SimpleObjectProperty;
 import javafx.collections.FXCollections;
 import javafx.collections.ObservableList;
+import org.seepledger.desktop.session.Draped;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.task.EntryGuard;
@@ -18,6 +19,7 @@ import org.seepledger.desktop.task.Lane;
 import org.seepledger.desktop.task.PaneState;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.words.FaultWords;
+import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.job.GridLayer;
 import org.seepledger.job.MapQuantity;
@@ -49,6 +51,8 @@ public final class ValuesModel {
         session.layer().addListener((layer, before, after) -> refresh());
         session.interval().addListener((interval, before, after) -> refresh());
         quantity.addListener((chosen, before, after) -> refresh());
+        view.addListener((shown, before, after) -> tell());
+        scale.addListener((colours, before, after) -> tell());
         session.demand().addListener((demand, before, after) -> meet(after));
         begin(session.set().get());
     }
@@ -63,6 +67,13 @@ public final class ValuesModel {
         quantity.set(Optional.empty());
         quantities.setAll(set.map(opened -> opened.workbench().quantities()).orElse(List.of()));
         quantity.set(quantities.stream().findFirst());
+    }
+
+    private void tell() {
+        session.draped()
+                .set(view.get()
+                        .flatMap(shown -> scale.get()
+                                .map(colours -> new Draped(shown.request().quantity(), colours))));
     }
 
     private void meet(Session.Demand demand) {
@@ -202,6 +213,11 @@ public final class ValuesModel {
     private void colour(LayerView shown, ValueScale taken) {
         scales.put(alike(shown.request()), taken);
         scale.set(Optional.of(taken));
+    }
+
+    /** {@return how numbers are written} */
+    ReadOnlyObjectProperty<NumberForm> numbers() {
+        return session.numbers();
     }
 
     /** {@return what can be shown} */

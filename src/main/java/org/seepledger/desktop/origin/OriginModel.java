@@ -125,13 +125,20 @@ public final class OriginModel {
         question.ifPresent(last -> session.asked().set(Optional.of(last.row())));
     }
 
+    private String shown(double value) {
+        return session.numbers().get().of(Figures.typeset(value));
+    }
+
     private void trace(Question asked) {
         question = Optional.of(asked);
         belongs.set(Words.of(
                 "origin.belongs",
                 asked.prism().name(),
                 asked.itemWords(),
-                PeriodWords.of(asked.period(), asked.set().aquifer().times())));
+                PeriodWords.of(
+                        asked.period(),
+                        asked.set().aquifer().times(),
+                        session.numbers().get())));
         command.set(asked.command().toString());
         state.set(PaneState.working(Words.of("origin.working")));
         tracing.run(
@@ -156,7 +163,7 @@ public final class OriginModel {
         answer = Optional.of(number);
         Wording wording = Wording.typeset(number.units());
         String unit = wording.unit(number.units().rate());
-        sum.set(Words.of("origin.sum", Figures.typeset(number.net()), unit, number.count(), number.sum())
+        sum.set(Words.of("origin.sum", shown(number.net()), unit, number.count(), number.sum())
                 + volume(number, wording));
         fill();
         showRemark();
@@ -175,7 +182,7 @@ public final class OriginModel {
         return " "
                 + Words.of(
                         "origin.volume",
-                        Figures.typeset(volume),
+                        shown(volume),
                         wording.unit(number.units().volume()));
     }
 
@@ -189,14 +196,14 @@ public final class OriginModel {
                 number.largest().stream().filter(line -> holds(line, words)).toList());
         double part = lines.stream().mapToDouble(Line::contribution).sum();
         String unit = Wording.typeset(number.units()).unit(number.units().rate());
-        String text = Words.of("origin.shown", lines.size(), Figures.typeset(part), unit);
+        String text = Words.of("origin.shown", lines.size(), shown(part), unit);
         shown.set(
                 number.count() > number.largest().size()
                         ? text + " "
                                 + Words.of(
                                         "origin.rest",
                                         number.count() - number.largest().size(),
-                                        Figures.typeset(number.rest()),
+                                        shown(number.rest()),
                                         unit)
                         : text);
     }

@@ -4,7 +4,6 @@ import java.util.Optional;
 import java.util.function.DoubleFunction;
 import javafx.beans.value.ObservableValue;
 import javafx.scene.AccessibleRole;
-import javafx.scene.canvas.Canvas;
 import javafx.scene.layout.Region;
 import org.seepledger.desktop.theme.Theme;
 import org.seepledger.picture.Picture;
@@ -14,7 +13,7 @@ public final class PictureView extends Region {
 
     private final ForSize pictures;
     private final ObservableValue<Theme> theme;
-    private final Canvas canvas = new Canvas();
+    private final SharpCanvas canvas = new SharpCanvas(this::redraw);
     private double drawnWidth = Double.NaN;
     private double drawnHeight = Double.NaN;
 
@@ -73,17 +72,16 @@ public final class PictureView extends Region {
     }
 
     private void draw(Picture picture) {
-        canvas.setWidth(picture.width());
-        canvas.setHeight(picture.height());
-        canvas.getGraphicsContext2D().clearRect(0, 0, picture.width(), picture.height());
-        new MarkPainter(canvas.getGraphicsContext2D(), theme.getValue()).paint(picture.marks());
+        canvas.size(picture.width(), picture.height());
+        canvas.context().clearRect(0, 0, picture.width(), picture.height());
+        new MarkPainter(canvas.context(), theme.getValue()).paint(picture.marks());
         setAccessibleText(picture.title() + ". " + picture.description());
         setMinHeight(picture.height());
         setPrefHeight(picture.height());
     }
 
     private void clear() {
-        canvas.getGraphicsContext2D().clearRect(0, 0, canvas.getWidth(), canvas.getHeight());
+        canvas.context().clearRect(0, 0, canvas.getWidth(), canvas.getHeight());
         setAccessibleText("");
     }
 }

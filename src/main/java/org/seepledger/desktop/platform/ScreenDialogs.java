@@ -8,44 +8,50 @@ import javafx.stage.DirectoryChooser;
 import javafx.stage.FileChooser;
 import javafx.stage.Window;
 import org.seepledger.desktop.port.FileDialogs;
+import org.seepledger.desktop.port.Settings;
 
-/** The desktop's own file dialogs, which begin where the last one ended. */
+/** The desktop's own file dialogs, which begin where the last one of their purpose ended. */
 public final class ScreenDialogs implements FileDialogs {
 
     private final Window owner;
-    private Optional<File> last = Optional.empty();
+    private final LastFolders folders;
 
     /**
      * Makes dialogs.
      *
      * @param owner the window that they belong to
+     * @param settings keep where a dialog of a purpose ended
      */
-    public ScreenDialogs(Window owner) {
+    public ScreenDialogs(Window owner, Settings settings) {
         this.owner = owner;
+        this.folders = new LastFolders(settings);
     }
 
     @Override
     public Optional<Path> folder(String title) {
         DirectoryChooser chooser = new DirectoryChooser();
         chooser.setTitle(title);
-        last.ifPresent(chooser::setInitialDirectory);
-        return kept(chooser.showDialog(owner));
+        folders.of(title).ifPresent(chooser::setInitialDirectory);
+        return kept(title, chooser.showDialog(owner));
     }
 
     @Override
     public Optional<Path> fileToRead(String title, Kind kind) {
-        return kept(chooser(title, kind).showOpenDialog(owner));
+        return kept(title, chooser(title, kind).showOpenDialog(owner));
     }
 
     @Override
     public List<Path> filesToRead(String title) {
         FileChooser chooser = new FileChooser();
         chooser.setTitle(title);
-        last.ifPresent(chooser::setInitialDirectory);
+        folders.of(title).ifPresent(chooser::setInitialDirectory);
         List<File> chosen = chooser.showOpenMultipleDialog(owner);
         return chosen == null
                 ? List.of()
-                : chosen.stream().map(this::kept).flatMap(Optional::stream).toList();
+                : chosen.stream()
+                        .map(file -> kept(title, file))
+                        .flatMap(Optional::stream)
+                        .toList();
     }
 
     @Override
@@ -56,20 +62,20 @@ public final class ScreenDialogs implements FileDialogs {
             chooser.setInitialDirectory(folder);
         }
         chooser.setInitialFileName(suggested.getFileName().toString());
-        return kept(chooser.showSaveDialog(owner));
+        return kept(title, chooser.showSaveDialog(owner));
     }
 
     private FileChooser chooser(String title, Kind kind) {
         FileChooser chooser = new FileChooser();
         chooser.setTitle(title);
         chooser.getExtensionFilters().add(new FileChooser.ExtensionFilter(kind.words(), kind.pattern()));
-        last.ifPresent(chooser::setInitialDirectory);
+        folders.of(title).ifPresent(chooser::setInitialDirectory);
         return chooser;
     }
 
-    private Optional<Path> kept(File chosen) {
+    private Optional<Path> kept(String title, File chosen) {
         Optional<File> answer = Optional.ofNullable(chosen);
-        answer.map(File::getAbsoluteFile).map(File::getParentFile).ifPresent(folder -> last = Optional.of(folder));
+        answer.ifPresent(file -> folders.remember(title, file));
         return answer.map(File::toPath);
     }
 }

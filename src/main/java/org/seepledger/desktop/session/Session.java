@@ -2,6 +2,7 @@ package org.seepledger.desktop.session;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.TreeMap;
 import javafx.beans.property.IntegerProperty;
 import javafx.beans.property.ObjectProperty;
@@ -14,9 +15,12 @@ import javafx.beans.property.StringProperty;
 import javafx.collections.FXCollections;
 import javafx.collections.ObservableMap;
 import org.seepledger.desktop.notice.Notices;
+import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.job.ShownPicture;
 import org.seepledger.job.TracedNumber;
 import org.seepledger.job.WellPlace;
+import org.seepledger.picture.Section;
+import org.seepledger.picture.SectionLine;
 import org.seepledger.prism.Prism;
 import org.seepledger.report.CellPlace;
 
@@ -38,10 +42,15 @@ public final class Session {
     private final ObjectProperty<Optional<RowAsked>> asked = new SimpleObjectProperty<>(Optional.empty());
     private final StringProperty solute = new SimpleStringProperty("");
     private final StringProperty status = new SimpleStringProperty("");
+    private final ObjectProperty<NumberForm> numbers = new SimpleObjectProperty<>(NumberForm.SPACE_POINT);
     private final Notices notices = new Notices();
     private final ObjectProperty<List<WellPlace>> wells = new SimpleObjectProperty<>(List.of());
     private final ObjectProperty<FaceFlows> faceFlows = new SimpleObjectProperty<>(FaceFlows.NONE);
     private final ObjectProperty<Optional<CellPlace>> target = new SimpleObjectProperty<>(Optional.empty());
+    private final ObjectProperty<Optional<Draped>> draped = new SimpleObjectProperty<>(Optional.empty());
+    private final ObjectProperty<Optional<SectionLine>> sectionLine = new SimpleObjectProperty<>(Optional.empty());
+    private final ObjectProperty<Optional<Section>> section = new SimpleObjectProperty<>(Optional.empty());
+    private final ObjectProperty<OptionalDouble> along = new SimpleObjectProperty<>(OptionalDouble.empty());
     private final ObjectProperty<Demand> demand = new SimpleObjectProperty<>(Demand.NONE);
 
     /** What one pane asks of the map. */
@@ -53,7 +62,9 @@ public final class Session {
         /** To begin to draw a prism. */
         DRAW_PRISM,
         /** To begin to draw a transect. */
-        DRAW_TRANSECT
+        DRAW_TRANSECT,
+        /** To begin to draw the line of a section. */
+        DRAW_SECTION
     }
 
     /**
@@ -63,6 +74,8 @@ public final class Session {
      */
     public void show(Optional<OpenSet> opened) {
         lit.set("");
+        draped.set(Optional.empty());
+        sectionLine.set(Optional.empty());
         marked.set(List.of());
         faceFlows.set(FaceFlows.NONE);
         solute.set("");
@@ -135,6 +148,11 @@ public final class Session {
         return lit;
     }
 
+    /** {@return how numbers are written in the window} */
+    public ObjectProperty<NumberForm> numbers() {
+        return numbers;
+    }
+
     /** {@return the cells that are lit up, since a number rests on values in them} */
     public ObjectProperty<List<TracedNumber.Cell>> marked() {
         return marked;
@@ -173,6 +191,26 @@ public final class Session {
     /** {@return the place that a pane asks the map to go to; whoever goes there empties it} */
     public ObjectProperty<Optional<CellPlace>> target() {
         return target;
+    }
+
+    /** {@return what lies over the map, and in which colours} */
+    public ObjectProperty<Optional<Draped>> draped() {
+        return draped;
+    }
+
+    /** {@return the line that the section follows, if one is drawn} */
+    public ObjectProperty<Optional<SectionLine>> sectionLine() {
+        return sectionLine;
+    }
+
+    /** {@return the section as it was last worked out, to be drawn by {@link org.seepledger.picture.SectionPicture}} */
+    public ObjectProperty<Optional<Section>> section() {
+        return section;
+    }
+
+    /** {@return how far along the section's line somebody points, on the map or in the section, in plan units} */
+    public ObjectProperty<OptionalDouble> along() {
+        return along;
     }
 
     /** {@return what a pane asks of the map; whoever meets it sets it back to none} */

@@ -14,7 +14,7 @@ import org.seepledger.desktop.words.Words;
 /** The line on top: which aquifer, and as a sentence what of it is shown. */
 final class Caption extends HBox {
 
-    Caption(ShellModel model, Node showing, Runnable actions) {
+    Caption(ShellModel model, Node showing, Runnable actions, Runnable handOver) {
         getStyleClass().add("sl-caption");
         Button name = button("", model::turnPage, "caption.name.tip");
         name.setId("set-name");
@@ -28,7 +28,10 @@ final class Caption extends HBox {
         setHgrow(gap, Priority.ALWAYS);
         Label mark = new Label("≋");
         mark.getStyleClass().add("sl-mark");
-        getChildren().addAll(mark, name, showing, gap, theme(model), button(Words.of("caption.actions"), actions, ""));
+        Button over = button(Words.of("caption.handover"), handOver, "action.handover");
+        over.setId("hand-over");
+        getChildren()
+                .addAll(mark, name, showing, gap, over, theme(model), button(Words.of("caption.actions"), actions, ""));
     }
 
     /** Adds a button before the last two. */

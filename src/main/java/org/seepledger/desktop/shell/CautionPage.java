@@ -3,6 +3,8 @@ package org.seepledger.desktop.shell;
 import javafx.beans.value.ObservableValue;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
+import javafx.scene.control.ScrollPane;
+import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.ledger.Disclaimer;
@@ -17,18 +19,21 @@ final class CautionPage extends VBox {
         setMaxSize(600, USE_PREF_SIZE);
         Label title = new Label(Words.of("caution.title"));
         title.getStyleClass().add("sl-heading");
-        getChildren().add(title);
-        Disclaimer.sentences().forEach(sentence -> getChildren().add(line(sentence)));
+        VBox sentences = new VBox(12);
+        Disclaimer.sentences().forEach(sentence -> sentences.getChildren().add(line(sentence)));
         VBox ofSolutes = new VBox(12);
         SoluteCautions.sentences().forEach(sentence -> ofSolutes.getChildren().add(line(sentence)));
         ofSolutes.visibleProperty().bind(solutes);
         ofSolutes.managedProperty().bind(ofSolutes.visibleProperty());
-        getChildren().add(ofSolutes);
+        sentences.getChildren().add(ofSolutes);
+        ScrollPane scroll = new ScrollPane(sentences);
+        scroll.setFitToWidth(true);
+        setVgrow(scroll, Priority.ALWAYS);
         Button done = new Button(Words.of("close"));
         done.setDefaultButton(true);
         done.setCancelButton(true);
         done.setOnAction(pressed -> close.run());
-        getChildren().add(done);
+        getChildren().addAll(title, scroll, done);
     }
 
     private static Label line(String sentence) {

@@ -18,10 +18,10 @@ final class Fold {
     private final SplitPane split;
     private final Node pane;
     private final Settings settings;
-    private final String key;
+    private String key;
     private final BooleanProperty open = new SimpleBooleanProperty(true);
-    private final double least;
-    private final double share;
+    private double least;
+    private double share;
     private double size;
 
     /**
@@ -99,6 +99,20 @@ final class Fold {
 
     private boolean isHeld() {
         return split.lookupAll(".split-pane-divider").stream().anyMatch(Node::isPressed);
+    }
+
+    /** The pane shows something else, whose size is kept by itself. */
+    void take(String otherKey, double otherLeast, double otherShare) {
+        key = otherKey;
+        least = otherLeast;
+        share = otherShare;
+        size = settings.get(key).map(Fold::number).orElse(0.0);
+        place();
+    }
+
+    /** Shows the pane, if it is folded away. */
+    void show() {
+        open.set(true);
     }
 
     /** Folds the pane away, or shows it again. */

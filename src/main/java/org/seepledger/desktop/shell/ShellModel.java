@@ -4,7 +4,6 @@ import java.util.Optional;
 import javafx.beans.property.BooleanProperty;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.SimpleBooleanProperty;
-import javafx.beans.property.SimpleObjectProperty;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.theme.Theme;
@@ -14,15 +13,17 @@ public final class ShellModel {
 
     private final Session session;
     private final BooleanProperty atWelcome = new SimpleBooleanProperty(true);
-    private final ObjectProperty<Theme> theme = new SimpleObjectProperty<>(Theme.LIGHT);
+    private final ObjectProperty<Theme> theme;
 
     /**
      * Makes the model.
      *
      * @param session what the window looks at
+     * @param theme light or dark
      */
-    public ShellModel(Session session) {
+    public ShellModel(Session session, ObjectProperty<Theme> theme) {
         this.session = session;
+        this.theme = theme;
         session.set().addListener((set, before, after) -> atWelcome.set(after.isEmpty()));
     }
 

@@ -4,6 +4,7 @@ import java.util.EnumSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import javafx.beans.value.ObservableValue;
 import javafx.geometry.Orientation;
 import javafx.scene.Node;
 import javafx.scene.control.Control;
@@ -13,13 +14,17 @@ import javafx.scene.input.KeyCode;
 import javafx.scene.input.KeyCombination;
 import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.BorderPane;
+import javafx.scene.layout.Region;
 import javafx.scene.layout.StackPane;
 import org.seepledger.desktop.action.Action;
 import org.seepledger.desktop.action.Actions;
 import org.seepledger.desktop.action.ActionsPage;
+import org.seepledger.desktop.action.OwnKeys;
 import org.seepledger.desktop.notice.NoticeLine;
 import org.seepledger.desktop.notice.NoticePage;
 import org.seepledger.desktop.port.Settings;
+import org.seepledger.desktop.preferences.PreferencesModel;
+import org.seepledger.desktop.preferences.PreferencesPage;
 import org.seepledger.desktop.running.RunningList;
 import org.seepledger.desktop.running.RunningModel;
 import org.seepledger.desktop.running.RunningStrip;
@@ -32,11 +37,18 @@ public final class ShellView extends StackPane {
     private static final Set<KeyCode> WORKING_KEYS =
             EnumSet.of(KeyCode.TAB, KeyCode.ENTER, KeyCode.SPACE, KeyCode.DELETE, KeyCode.BACK_SPACE);
 
+    /** Less room than this, and what lies over the map would lie over each other: then the whole is scrolled. */
+    private static final double LEAST_WIDTH = 1180;
+
+    private static final double LEAST_HEIGHT = 720;
     /** How wide the pane beside the map is at first, in logical pixels, at least, and as a share of the window. */
     private static final double[] SIDE = {452, 0.3};
 
     /** How high the pane below it is at first. */
     private static final double[] BELOW = {196, 0.22};
+
+    /** How high the section is at first. */
+    private static final double[] SECTION = {290, 0.36};
 
     private final ShellModel model;
     private final Actions actions;
@@ -48,6 +60,7 @@ public final class ShellView extends StackPane {
     private final BorderPane work = new BorderPane();
     private final StackPane veil = new StackPane();
     private final ActionsPage actionsPage;
+    private final PreferencesPage preferencesPage;
     private final NoticePage noticePage;
     private final RunningList runningList;
     private final CautionPage cautionPage;
@@ -59,9 +72,16 @@ public final class ShellView extends StackPane {
      * @param slots what is put into the frame
      * @param actions everything that can be done
      * @param running what runs beside the window
+     * @param preferences what users want for good
      * @param settings keep how large panes are
      */
-    public ShellView(ShellModel model, Slots slots, Actions actions, RunningModel running, Settings settings) {
+    public ShellView(
+            ShellModel model,
+            Slots slots,
+            Actions actions,
+            RunningModel running,
+            PreferencesModel preferences,
+            Settings settings) {
         this.model = model;
         this.slots = slots;
         this.actions = actions;
@@ -73,10 +93,12 @@ public final class ShellView extends StackPane {
                 this::lift);
         this.actionsPage = new ActionsPage(actions, this::lift);
         work.setCenter(panes());
+        this.preferencesPage = new PreferencesPage(preferences, this::lift);
         across.getItems().add(slots.map());
         this.side = slots.ledger().map(pane -> new Fold(across, pane, SIDE[0], SIDE[1], settings, "side.width"));
         this.below = slots.ribbon().map(pane -> new Fold(down, pane, BELOW[0], BELOW[1], settings, "below.height"));
-        Caption caption = new Caption(model, slots.showing(), this::showActions);
+        Caption caption =
+                new Caption(model, slots.showing(), this::showActions, () -> actions.perform("action.handover"));
         side.ifPresent(fold -> caption.add(fold.button("fold-side", "action.fold.side")));
         below.ifPresent(fold -> caption.add(fold.button("fold-below", "action.fold.below")));
         work.setTop(caption);
@@ -93,10 +115,32 @@ public final class ShellView extends StackPane {
                 lift();
             }
         });
-        getChildren().addAll(work, slots.welcome(), veil);
+        getChildren().addAll(work, slots.welcome());
         slots.welcome().visibleProperty().bind(model.atWelcome());
         work.visibleProperty().bind(model.atWelcome().not());
+        work.visibleProperty().addListener((visible, before, after) -> requestLayout());
+        work.setMinSize(LEAST_WIDTH, LEAST_HEIGHT);
         addEventFilter(KeyEvent.KEY_PRESSED, this::onKey);
+    }
+
+    /** The page that is not shown needs no room, but is laid out, so that it is there at once when it is turned to. */
+    @Override
+    protected double computeMinWidth(double height) {
+        return shown().minWidth(height);
+    }
+
+    @Override
+    protected double computeMinHeight(double width) {
+        return shown().minHeight(width);
+    }
+
+    private Node shown() {
+        return work.isVisible() ? work : slots.welcome();
+    }
+
+    /** {@return what lies over the window while a page is read} */
+    public Region veil() {
+        return veil;
     }
 
     private Node panes() {
@@ -115,6 +159,24 @@ public final class ShellView extends StackPane {
         below.ifPresent(Fold::turn);
     }
 
+    /** Shows the pane below the map, if it is folded away. */
+    public void showBelow() {
+        below.ifPresent(Fold::show);
+    }
+
+    /**
+     * Gives the pane below the map a height for each of its pages.
+     *
+     * @param page which page is open: 0 for time, 1 for the section
+     */
+    public void spreadBelow(ObservableValue<Number> page) {
+        page.addListener((open, before, after) -> below.ifPresent(fold -> {
+            double[] size = after.intValue() == 0 ? BELOW : SECTION;
+            fold.show();
+            fold.take(after.intValue() == 0 ? "below.height" : "section.height", size[0], size[1]);
+        }));
+    }
+
     /** Shows the page of all actions. */
     public void showActions() {
         lower(actionsPage);
@@ -125,6 +187,12 @@ public final class ShellView extends StackPane {
     public void showCaution() {
         lower(cautionPage);
         cautionPage.requestFocus();
+    }
+
+    /** Shows the preferences. */
+    public void showPreferences() {
+        lower(preferencesPage);
+        preferencesPage.open();
     }
 
     /** Shows all notices. */
@@ -216,6 +284,9 @@ public final class ShellView extends StackPane {
 
     private boolean isKept(KeyEvent key) {
         Node owner = getScene().getFocusOwner();
+        if (owner instanceof OwnKeys own && own.keeps(key)) {
+            return true;
+        }
         if (key.getCode().isFunctionKey() || key.getCode() == KeyCode.ESCAPE && key.isShiftDown()) {
             return false;
         }

@@ -101,7 +101,6 @@ public final class LivePlume {
     public void again() {
         now.again();
         whole.again();
-        follow();
     }
 
     private void begin() {

@@ -1,9 +1,11 @@
 package org.seepledger.desktop.solute;
 
+import java.util.EnumSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import javafx.beans.value.ObservableValue;
 import org.seepledger.balance.Periods;
 import org.seepledger.desktop.session.Drawing;
@@ -17,10 +19,12 @@ import org.seepledger.ledger.Period;
 import org.seepledger.report.Term;
 
 /**
- * Tells the map what mass of the solute looked at passes the selected prism's sides in the interval looked at, with the water and
+ * Tells map and section what mass of the solute looked at passes the selected prism's faces in the interval looked at, with the water and
  * by dispersion.
  */
 public final class MassFeed {
+
+    private static final Set<Group> FACES = EnumSet.of(Group.SIDE, Group.LID, Group.DISPERSION);
 
     private final Session session;
     private final LivePlume plumes;
@@ -68,17 +72,17 @@ public final class MassFeed {
         Drawing drawing = session.drawing().get();
         MassUnits units = masses.inUse(set);
         return plumes.shown(interval).map(shown -> {
-            Map<String, Double> net = new LinkedHashMap<>();
+            Map<String, Double> sides = new LinkedHashMap<>();
+            Map<String, Double> lids = new LinkedHashMap<>();
             for (Term term : Term.of(shown.in(interval).budget())) {
-                boolean side =
-                        term.group() == Group.SIDE || term.group() == Group.DISPERSION && net.containsKey(term.item());
-                if (side && term.quantified()) {
-                    net.merge(term.item(), term.net() / interval.duration() * units.rateFactor(), Double::sum);
+                Map<String, Double> faces = term.group() == Group.LID || lids.containsKey(term.item()) ? lids : sides;
+                if (FACES.contains(term.group()) && term.quantified()) {
+                    faces.merge(term.item(), term.net() / interval.duration() * units.rateFactor(), Double::sum);
                 }
             }
             boolean isNow = Optional.of(shown.prism()).equals(session.selectedPrism());
             long revision = isNow ? drawing.revision() : FaceFlows.NONE.revision();
-            return new FaceFlows(revision, shown.prism().name(), units.rate().toString(), net);
+            return new FaceFlows(revision, shown.prism().name(), units.rate().toString(), sides, lids);
         });
     }
 }

@@ -86,7 +86,8 @@ public final class SoluteAnswersModel {
                         .map(shown -> Words.of(
                                 "ledger.of.solute",
                                 session.solute().get(),
-                                shown.in(record(set)).whose(set))))
+                                shown.in(record(set))
+                                        .whose(set, session.numbers().get()))))
                 .orElse("");
     }
 
@@ -114,7 +115,10 @@ public final class SoluteAnswersModel {
                 reading.periods(set),
                 water.budget(),
                 look.choice(set).above());
-        return SoluteAnswer.of(result, units, Wording.typeset(units.ofBudget()));
+        return SoluteAnswer.of(
+                result,
+                units,
+                Wording.typeset(units.ofBudget(), session.numbers().get()::of));
     }
 
     /** {@return what the trend of mass and outflow is, in sentences; empty where it is not known} */

@@ -40,6 +40,7 @@ public final class SolutePanelModel {
                 session.solute(),
                 session.interval(),
                 session.selected(),
+                session.numbers(),
                 look.changes(),
                 plumes.known(),
                 plumes.record())) {
@@ -79,6 +80,10 @@ public final class SolutePanelModel {
                 .orElse(""));
     }
 
+    private String number(double value) {
+        return session.numbers().get().of(Figures.typeset(value));
+    }
+
     private Optional<String> above(OpenSet set) {
         int interval = session.interval().get();
         Period period = set.workbench().periods(Periods.Every.INTERVAL, 1).get(interval);
@@ -90,9 +95,9 @@ public final class SolutePanelModel {
                     return Words.of(
                             "solute.above",
                             shown.prism().name(),
-                            Figures.typeset(stock.areaAbove()),
+                            number(stock.areaAbove()),
                             Wording.raised(Measure.power(length, 2)),
-                            Figures.typeset(stock.rockAbove()),
+                            number(stock.rockAbove()),
                             Wording.raised(Measure.power(length, 3)));
                 }));
     }

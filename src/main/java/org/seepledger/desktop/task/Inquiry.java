@@ -132,13 +132,6 @@ public final class Inquiry<Q, A> {
         return PaneState.working(Words.of(last.get().isPresent() ? "budget.working.shown" : "budget.working"));
     }
 
-    /** Makes that a question which was stopped or failed is asked again when it is next wanted. */
-    public void again() {
-        if (asked.isEmpty()) {
-            wanted = Optional.empty();
-        }
-    }
-
     /**
      * Wants nothing, but keeps the last answer.
      *
@@ -188,6 +181,16 @@ public final class Inquiry<Q, A> {
             tell(PaneState.failed(fault instanceof Cancelled ? Words.of("stopped.again") : FaultWords.of(fault)));
         }
         askNext(question);
+    }
+
+    /** Asks again what was stopped or failed. */
+    public void again() {
+        if (asked.isEmpty() && state.get().phase() == PaneState.Phase.FAILED) {
+            wanted.ifPresent(question -> {
+                tell(working());
+                ask(question, Duration.ZERO);
+            });
+        }
     }
 
     private void askNext(Q before) {

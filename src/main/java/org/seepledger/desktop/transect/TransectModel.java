@@ -155,6 +155,15 @@ public final class TransectModel {
         return reading;
     }
 
+    /**
+     * {@return a number as the window writes it}
+     *
+     * @param typeset the number, typeset
+     */
+    public String number(String typeset) {
+        return session.numbers().get().of(typeset);
+    }
+
     /** Asks the map to begin a transect. */
     public void draw() {
         session.demand().set(Session.Demand.DRAW_TRANSECT);
@@ -164,7 +173,6 @@ public final class TransectModel {
     public void again() {
         now.again();
         whole.again();
-        show();
     }
 
     /**
@@ -232,7 +240,8 @@ public final class TransectModel {
                 masses.inUse(set.get()),
                 found,
                 period,
-                PeriodWords.of(period, set.get().aquifer().times()))));
+                PeriodWords.of(
+                        period, set.get().aquifer().times(), session.numbers().get()))));
         state.set(inUse().state().get());
     }
 

@@ -146,19 +146,21 @@ public final class TransectView extends BorderPane {
         }
     }
 
-    private static TableColumn<TransectRow, TransectRow> column(Function<TransectRow, String> text, double width) {
+    private TableColumn<TransectRow, TransectRow> column(Function<TransectRow, String> text, double width) {
         TableColumn<TransectRow, TransectRow> column = new TableColumn<>();
         column.setSortable(false);
         column.setReorderable(false);
         column.setPrefWidth(width);
         column.setCellValueFactory(row -> new SimpleObjectProperty<>(row.getValue()));
-        column.setCellFactory(made -> new TextCell(text, width == NUMBER));
+        column.setCellFactory(
+                made -> new TextCell(width == NUMBER ? row -> model.number(text.apply(row)) : text, width == NUMBER));
         return column;
     }
 
     private void show(Optional<TransectTable> shown) {
         belongs.setText(shown.map(TransectTable::whose).orElse(""));
-        concentrated.setText(shown.map(TransectTable::concentrated).orElse(""));
+        concentrated.setText(
+                shown.map(TransectTable::concentrated).map(model::number).orElse(""));
         table.getItems().setAll(shown.map(TransectTable::rows).orElse(List.of()));
         shown.ifPresent(found -> {
             for (int column = 0; column < table.getColumns().size(); column++) {

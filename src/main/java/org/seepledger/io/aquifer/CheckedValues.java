@@ -1,6 +1,8 @@
 package org.seepledger.io.aquifer;
 
+import java.util.List;
 import org.seepledger.aquifer.GriddedValues;
+import org.seepledger.aquifer.Stored;
 import org.seepledger.aquifer.Window;
 import org.seepledger.fault.DataFault;
 
@@ -60,6 +62,13 @@ record CheckedValues(GriddedValues values, String place, Bounds bounds, double f
             }
             target[offset + i] = value * factor;
         }
+    }
+
+    @Override
+    public List<Stored> stored(int layer, int step, Window window) {
+        return values.stored(layer, step, window).stream()
+                .map(part -> part.times(factor))
+                .toList();
     }
 
     private DataFault fault(String cell, double value) {

@@ -96,6 +96,10 @@ public final class DrawingWriter {
             json.writeFieldName(lid);
             if (limit.get() instanceof Limit.Elevation elevation) {
                 json.writeNumber(elevation.height());
+            } else if (limit.get() instanceof Limit.Layer layer) {
+                json.writeStartObject();
+                json.writeNumberField("layer", layer.index() + 1);
+                json.writeEndObject();
             } else {
                 json.writeString(((Limit.Surface) limit.get()).path());
             }

@@ -9,6 +9,7 @@ import java.util.Set;
 import java.util.function.Consumer;
 import org.locationtech.jts.geom.Coordinate;
 import org.seepledger.aquifer.Grid;
+import org.seepledger.aquifer.Layer;
 import org.seepledger.fault.DataFault;
 import org.seepledger.io.DataFolder;
 import org.seepledger.io.crs.PlanCrs;
@@ -18,6 +19,7 @@ import org.seepledger.prism.Ring;
 import org.seepledger.prism.Side;
 import org.seepledger.prism.SideNumbering;
 import org.seepledger.sketch.Drawing;
+import org.seepledger.sketch.Limit;
 import org.seepledger.sketch.Place;
 import org.seepledger.sketch.PolygonCheck;
 import org.seepledger.sketch.Shape;
@@ -27,7 +29,7 @@ import org.seepledger.sketch.Shape;
  *
  * @param crs the aquifer's plan coordinates
  * @param grid its grid
- * @param layers how many layers it has
+ * @param layers its layers, from the top down
  * @param clip whether prisms that reach beyond the grid are cut at its edge; else they are refused
  * @param surfaces reads the rasters that stand for a top or bottom
  * @param warnings told what may make a number wrong, a line each
@@ -36,7 +38,7 @@ import org.seepledger.sketch.Shape;
 public record PrismsReader(
         PlanCrs crs,
         Grid grid,
-        int layers,
+        List<Layer> layers,
         boolean clip,
         SurfaceReader surfaces,
         Consumer<String> warnings,
@@ -52,7 +54,7 @@ public record PrismsReader(
     public List<Prism> read(Path file, String shownFile) {
         DataFolder folder = DataFolder.holding(file, shownFile);
         List<Prism> prisms = new ArrayList<>();
-        new ShapesReader(crs, layers, warnings, notes, PrismsReader::refuse)
+        new ShapesReader(crs, layers.size(), warnings, notes, PrismsReader::refuse)
                 .read(file, shownFile, (shape, spot) -> prisms.add(onGrid(shape, folder, spot)));
         if (prisms.isEmpty()) {
             throw new Spot(shownFile, "").fault("no features", "at least one polygon", "Draw a prism.");
@@ -91,7 +93,7 @@ public record PrismsReader(
     public List<Prism> asDrawn(Path file, String shownFile) {
         DataFolder folder = DataFolder.holding(file, shownFile);
         List<Prism> prisms = new ArrayList<>();
-        new ShapesReader(crs, layers, warnings, notes, PrismsReader::refuse)
+        new ShapesReader(crs, layers.size(), warnings, notes, PrismsReader::refuse)
                 .read(file, shownFile, (shape, spot) -> prisms.add(prism(shape, folder, spot)));
         return prisms;
     }
@@ -133,8 +135,11 @@ public record PrismsReader(
     }
 
     private Prism prism(Shape shape, DataFolder folder, Spot spot) {
-        return shape.prism(layers, (surface, lid) -> {
-            String path = surface.path();
+        return shape.prism(layers.size(), (limit, lid) -> {
+            if (limit instanceof Limit.Layer layer) {
+                return layer.among(layers, lid);
+            }
+            String path = ((Limit.Surface) limit).path();
             return surfaces.read(folder.resolve(path, spot.in(lid).place()), path);
         });
     }

@@ -39,6 +39,12 @@ final class ReachReader {
                     "a top above the bottom",
                     "Correct the elevations.");
         }
+        if (top.isObject() && bottom.isObject() && layer(top, spot.in("top")) > layer(bottom, spot.in("bottom"))) {
+            throw spot.fault(
+                    "top " + Spot.shown(top) + " and bottom " + Spot.shown(bottom),
+                    "a top above the bottom",
+                    "Layers count from the top down.");
+        }
         return new Reach.Between(limit(top, spot.in("top")), limit(bottom, spot.in("bottom")));
     }
 
@@ -65,18 +71,31 @@ final class ReachReader {
                 && number.doubleValue() <= layers;
     }
 
-    private static Optional<Limit> limit(JsonNode value, Spot spot) {
+    private int layer(JsonNode value, Spot spot) {
+        if (value.size() != 1 || !isLayer(value.path("layer"))) {
+            throw spot.fault(
+                    Spot.shown(value),
+                    "{\"layer\": n}, a whole number from 1 to " + layers + " counted from the top down",
+                    "Write, for instance, {\"layer\": " + layers + "}.");
+        }
+        return value.path("layer").intValue() - 1;
+    }
+
+    private Optional<Limit> limit(JsonNode value, Spot spot) {
         if (!isGiven(value)) {
             return Optional.empty();
         }
         if (value.isNumber() && Double.isFinite(value.doubleValue())) {
             return Optional.of(new Limit.Elevation(value.doubleValue()));
         }
+        if (value.isObject()) {
+            return Optional.of(new Limit.Layer(layer(value, spot)));
+        }
         if (!value.isTextual()) {
             throw spot.fault(
                     Spot.shown(value),
-                    "an elevation, or the path of a surface raster",
-                    "Write a number, a path, or leave it out for the grid's own.");
+                    "an elevation, a layer, or the path of a surface raster",
+                    "Write a number, {\"layer\": n}, a path, or leave it out for the grid's own.");
         }
         return Optional.of(new Limit.Surface(value.textValue()));
     }

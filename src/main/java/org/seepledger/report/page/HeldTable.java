@@ -76,8 +76,13 @@ final class HeldTable {
     /** At each instant, all layers together: {@code mass.csv} and {@code trend.csv} have the same. */
     DomContent throughTime() {
         String concentration = report.wording().unit(result.concentrationUnit());
+        String above = result.above().isPresent()
+                ? ", above "
+                        + report.wording()
+                                .quantity(result.above().getAsDouble() * result.concentrationFactor(), concentration)
+                : "";
         String title = about.name() + ": mass in place through time, masses in " + unit() + ", concentrations in "
-                + concentration;
+                + concentration + above;
         List<DomContent> columns = new ArrayList<>(List.of(
                 Cells.column("Instant"),
                 Cells.numberColumn("Mass"),
@@ -87,10 +92,10 @@ final class HeldTable {
                 Cells.numberColumn("Mean"),
                 Cells.numberColumn("Greatest")));
         if (result.above().isPresent()) {
-            columns.add(Cells.numberColumn("Rock above threshold, "
-                    + report.wording().unit(report.units().volume())));
             columns.add(Cells.numberColumn(
-                    "Area, " + report.wording().unit(report.units().area())));
+                    "Rock above, " + report.wording().unit(report.units().volume())));
+            columns.add(Cells.numberColumn(
+                    "Area above, " + report.wording().unit(report.units().area())));
         }
         List<TrTag> rows = new ArrayList<>();
         for (int instant = 0; instant <= result.end(); instant++) {

@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalInt;
 import java.util.stream.DoubleStream;
+import java.util.stream.IntStream;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.Block;
 import org.seepledger.aquifer.Concentration;
@@ -78,7 +79,7 @@ public final class PlumeDrawing {
                 line,
                 result.budget().record(),
                 rate,
-                Optional.of(new SectionPicture.Shade(cells::at, cells.scale, cells.words())),
+                Optional.of(new SectionPicture.Shade(cells::of, cells.scale, cells.words())),
                 WIDTH);
         boolean severalPeriods = result.budget().periods().size() > 1;
         return new PlumePictures(
@@ -155,10 +156,13 @@ public final class PlumeDrawing {
     private PlumeTrack track(PlumeResult result) {
         double unit = aquifer.grid().planUnit();
         List<PlumeTrack.Stop> stops = new ArrayList<>();
-        for (int instant = 0; instant <= result.end(); instant++) {
+        int[] located = IntStream.rangeClosed(0, result.end())
+                .filter(result.course()::isLocated)
+                .toArray();
+        for (int instant : located) {
             Course.Place at = result.course().at(instant);
             double time = aquifer.times().instant(instant);
-            String name = instant == 0 || instant == result.end()
+            String name = instant == located[0] || instant == located[located.length - 1]
                     ? aquifer.times().isoDate(time).orElseGet(() -> wording.number(time) + " " + aquifer.timeUnit())
                     : "";
             stops.add(PlumeTrack.Stop.of(at, unit, name));
@@ -166,7 +170,7 @@ public final class PlumeDrawing {
         return new PlumeTrack(stops);
     }
 
-    /** Concentrations at the record's end, in the solute's unit: read row by row, or cell by cell along a section. */
+    /** Concentrations at the record's end, in the solute's unit: read row by row, or in small windows along a section. */
     private final class Concentrations {
 
         private final PlumeResult result;
@@ -181,7 +185,7 @@ public final class PlumeDrawing {
             this.layer = fullest(result.plume(), result.end());
             this.drape = Drape.of(aquifer.grid(), around, ReportPictures.MOST_CELLS, row -> {
                 Window line = new Window(row, around.column(), 1, around.columns());
-                return Arrays.copyOfRange(read(line), layer * line.size(), (layer + 1) * line.size());
+                return of(layer, line);
             });
             double greatest = result.plume().whole(result.end()).maximum() * result.concentrationFactor();
             this.scale = ValueScale.ofConcentrations(
@@ -201,8 +205,8 @@ public final class PlumeDrawing {
             return values;
         }
 
-        double at(int ofLayer, int row, int column) {
-            return read(new Window(row, column, 1, 1))[ofLayer];
+        double[] of(int ofLayer, Window window) {
+            return Arrays.copyOfRange(read(window), ofLayer * window.size(), (ofLayer + 1) * window.size());
         }
 
         String words() {

@@ -11,23 +11,14 @@ import static j2html.TagCreator.html;
 import static j2html.TagCreator.main;
 import static j2html.TagCreator.meta;
 import static j2html.TagCreator.p;
-import static j2html.TagCreator.rawHtml;
-import static j2html.TagCreator.style;
-import static j2html.TagCreator.title;
 
-import j2html.TagCreator;
 import j2html.tags.DomContent;
 import j2html.tags.specialized.HeadTag;
-import java.io.IOException;
-import java.io.InputStream;
-import java.io.UncheckedIOException;
-import java.nio.charset.StandardCharsets;
 import java.util.List;
 import java.util.Map;
 import java.util.stream.IntStream;
 import org.seepledger.ledger.Disclaimer;
 import org.seepledger.ledger.SoluteCautions;
-import org.seepledger.report.InkStyle;
 import org.seepledger.report.PrismResult;
 
 /** Writes a report as one HTML page (the HTML standard of WHATWG) that needs nothing but itself. */
@@ -113,28 +104,14 @@ public final class ReportPage {
     }
 
     private static HeadTag head(Cover cover) {
-        String name = cover.masthead().title();
-        HeadTag head = TagCreator.head(
-                meta().withCharset("utf-8"),
-                title(name),
-                meta().withName("viewport").withContent("width=device-width, initial-scale=1"),
-                meta().withName("color-scheme").withContent("light dark"),
-                meta().withName("generator").withContent("Seepledger " + cover.version()));
+        HeadTag head = PageHead.of(cover.masthead().title(), cover.version());
         cover.masthead()
                 .author()
                 .ifPresent(author -> head.with(meta().withName("author").withContent(author)));
-        return head.with(style(rawHtml(InkStyle.css() + sheet() + PageFooter.css(name))));
+        return head;
     }
 
     private static DomContent disclaimer() {
         return each(Disclaimer.sentences(), sentence -> p(sentence));
-    }
-
-    private static String sheet() {
-        try (InputStream sheet = ReportPage.class.getResourceAsStream("page.css")) {
-            return new String(sheet.readAllBytes(), StandardCharsets.UTF_8);
-        } catch (IOException e) {
-            throw new UncheckedIOException(e);
-        }
     }
 }

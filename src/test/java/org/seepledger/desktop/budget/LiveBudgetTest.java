@@ -130,7 +130,8 @@ class LiveBudgetTest {
                 .budget(moved(500).get(0), reading.period(set, 0))
                 .orElseThrow();
         assertThat(shown.prism()).isEqualTo(moved(500).get(0));
-        assertThat(shown.whose(set)).contains("well field", "m²", "interval 1", "2021-10-01");
+        assertThat(shown.whose(set, org.seepledger.desktop.words.NumberForm.SPACE_POINT))
+                .contains("well field", "m²", "interval 1", "2021-10-01");
     }
 
     @Test

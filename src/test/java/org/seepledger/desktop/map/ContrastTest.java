@@ -82,7 +82,7 @@ class ContrastTest {
             session.selected().set("well field");
             session.lit().set("side 3");
             Map<String, Double> net = new HashMap<>(Map.of("side 3", -110.5, "side 4", 71.5));
-            session.faceFlows().set(new FaceFlows(1, "well field", "m3/d", net));
+            session.faceFlows().set(new FaceFlows(1, "well field", "m3/d", net, Map.of()));
             Camera camera = model.camera().get();
             List<Mark> marks = new ArrayList<>(Outlines.of(session, camera));
             marks.addAll(Lettering.of(model));

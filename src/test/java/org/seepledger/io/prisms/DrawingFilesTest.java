@@ -57,7 +57,7 @@ class DrawingFilesTest {
 
     private PrismsReader prisms() {
         SurfaceReader surfaces = (raster, shown) -> GriddedValues.constant(shown.length());
-        return new PrismsReader(UTM, GRID, 4, false, surfaces, notes::add, notes::add);
+        return new PrismsReader(UTM, GRID, FourLayers.ALL, false, surfaces, notes::add, notes::add);
     }
 
     private Drawing read(Path file) {
@@ -87,6 +87,9 @@ class DrawingFilesTest {
                                         .under(List.of(0, 1, 3), Optional.of("bank")))
                         .reaching(new Reach.Between(
                                 Optional.of(new Limit.Elevation(0.1)), Optional.of(new Limit.Surface("s/base.tif")))))
+                .with(Shape.of("on a layer", Drawn.box(499_500, 5_199_400, 499_600, 5_199_500))
+                        .reaching(new Reach.Between(
+                                Optional.of(new Limit.Elevation(95)), Optional.of(new Limit.Layer(1)))))
                 .with(Drawn.ofParts("parts", Drawn.box(499_700, 5_199_100, 499_800, 5_199_200)));
         Drawing back = read(written(drawing));
         assertThat(back).isEqualTo(drawing.edit(new RingAt("box", 1, 1), this::turned));

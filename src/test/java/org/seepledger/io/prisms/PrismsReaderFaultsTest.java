@@ -36,7 +36,7 @@ class PrismsReaderFaultsTest {
 
     private static void read(Path file, PlanCrs crs, boolean clip) {
         SurfaceReader none = (raster, shown) -> GriddedValues.constant(0);
-        new PrismsReader(crs, GRID, 4, clip, none, warning -> {}, note -> {}).read(file, "p.geojson");
+        new PrismsReader(crs, GRID, FourLayers.ALL, clip, none, warning -> {}, note -> {}).read(file, "p.geojson");
     }
 
     private AbstractThrowableAssert<?, ? extends Throwable> assertRefused(String text, PlanCrs crs, boolean clip)
@@ -89,7 +89,12 @@ class PrismsReaderFaultsTest {
                 "\"name\": \"A\", \"layers\": [1, 2], \"top\": 3; layers together with top or bottom",
                 "\"name\": \"A\", \"top\": 3, \"bottom\": 3; expected a top above the bottom",
                 "\"name\": \"A\", \"top\": [3]; feature 1 \"A\", top: found [3]",
-                "\"name\": \"A\", \"top\": 1e400; an elevation, or the path",
+                "\"name\": \"A\", \"top\": 1e400; an elevation, a layer, or the path",
+                "\"name\": \"A\", \"top\": {\"layer\": 5}; feature 1 \"A\", top: found {\"layer\":5}; expected {\"layer\": n}",
+                "\"name\": \"A\", \"top\": {\"layer\": 1.5}; from 1 to 4",
+                "\"name\": \"A\", \"bottom\": {\"layers\": 2}; bottom: found {\"layers\":2}",
+                "\"name\": \"A\", \"bottom\": {\"layer\": 2, \"of\": 1}; bottom: found {\"layer\":2,",
+                "\"name\": \"A\", \"top\": {\"layer\": 3}, \"bottom\": {\"layer\": 2}; expected a top above the bottom",
                 "\"name\": \"A\", \"bottom\": \"../x.tif\"; bottom: found the path \"../x.tif\", which leads out",
                 "\"name\": \"A\", \"bottom\": \"x.tif\"; bottom: found the path \"x.tif\", which does not exist",
             })

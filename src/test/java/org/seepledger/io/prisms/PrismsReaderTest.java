@@ -40,7 +40,8 @@ class PrismsReaderTest {
     private List<Prism> read(String text, PlanCrs crs, Grid grid, boolean clip) throws IOException {
         Path file = Files.writeString(folder.resolve("prisms.geojson"), text);
         SurfaceReader surfaces = (raster, shown) -> GriddedValues.constant(shown.length());
-        return new PrismsReader(crs, grid, 4, clip, surfaces, warnings::add, notes::add).read(file, "prisms.geojson");
+        return new PrismsReader(crs, grid, FourLayers.ALL, clip, surfaces, warnings::add, notes::add)
+                .read(file, "prisms.geojson");
     }
 
     private Prism local(String properties, String type, String coordinates) throws IOException {
@@ -155,6 +156,21 @@ class PrismsReaderTest {
                 .range();
         assertThat(open.top()).isEmpty();
         assertThat(value(open.bottom().orElseThrow())).isEqualTo(-3);
+    }
+
+    @Test
+    void aLidMayLieOnALayer() throws IOException {
+        Elevations range = (Elevations) local(
+                        "\"name\": \"A\", \"top\": {\"layer\": 2}, \"bottom\": {\"layer\": 3}",
+                        "Polygon",
+                        "[" + SQUARE + "]")
+                .range();
+        assertThat(value(range.top().orElseThrow())).isEqualTo(30);
+        assertThat(value(range.bottom().orElseThrow())).isEqualTo(10);
+        Elevations mixed = (Elevations)
+                local("\"name\": \"A\", \"top\": {\"layer\": 1}, \"bottom\": 7", "Polygon", "[" + SQUARE + "]")
+                        .range();
+        assertThat(value(mixed.top().orElseThrow())).isEqualTo(40);
     }
 
     private static double value(GriddedValues surface) {

@@ -1,0 +1,71 @@
+package org.seepledger.cli;
+
+import java.nio.file.Path;
+import java.time.LocalDate;
+import java.util.concurrent.Callable;
+import org.seepledger.job.CompareJob;
+import org.seepledger.job.CompareRequest;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.Parameters;
+
+/** {@code seepledger compare}. */
+@Command(
+        name = "compare",
+        description =
+                "Puts two runs of balance side by side, and tells which part of each difference is due to the area, the"
+                        + " period, the inputs and the unit. The parts add to the difference.",
+        mixinStandardHelpOptions = true,
+        sortOptions = false,
+        footer = {
+            "",
+            "The parts are told by striking the budgets again, each run's inputs with each run's prisms and periods; this needs"
+                    + " the inputs of both runs where they were, unchanged. Without them the differences alone are given.",
+            "",
+            "Example: the budgets before and after a change.",
+            "  seepledger compare budget-before budget-after --out comparison",
+            "",
+            "Written to DIR: compare.html (to read), differences.csv, inputs.csv (inputs by hash), run.json.",
+            "Exit status: 0 done; 1 a fault of the program; 2 the command line is wrong; 3 the data are wrong."
+        })
+final class CompareCommand implements Callable<Integer> {
+
+    private final Terminal terminal;
+
+    @Parameters(index = "0", paramLabel = "RUN", description = "The folder that the first run of balance wrote.")
+    private Path first;
+
+    @Parameters(index = "1", paramLabel = "RUN", description = "The folder that the second run wrote.")
+    private Path second;
+
+    @Option(
+            names = "--out",
+            paramLabel = "DIR",
+            required = true,
+            description = "A new or empty folder for the results.")
+    private Path out;
+
+    @Option(names = "--overwrite", description = "Replace the files that an earlier comparison wrote to DIR.")
+    private boolean overwrite;
+
+    @Option(names = "--threads", paramLabel = "N", description = "How many threads may work (default: all processors).")
+    private int threads = Runtime.getRuntime().availableProcessors();
+
+    @Option(
+            names = "--progress",
+            negatable = true,
+            description = "Print progress to standard error (default: if a terminal is attached).")
+    private Boolean progress;
+
+    CompareCommand(Terminal terminal) {
+        this.terminal = terminal;
+    }
+
+    @Override
+    public Integer call() {
+        CompareRequest request = new CompareRequest(
+                first, second, out, Choices.threads(threads), overwrite, LocalDate.now(terminal.clock()));
+        terminal.out().print(CompareJob.run(request, terminal.progress(progress)));
+        return 0;
+    }
+}

@@ -1,0 +1,2 @@
+/** How large everything in the window is. */
+package org.seepledger.desktop.size;
