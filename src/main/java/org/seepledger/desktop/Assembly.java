@@ -113,6 +113,8 @@ final class Assembly {
         tray.whenLeft(mapView::focus);
         this.running = new RunningModel(outside.tasks()::running);
         this.folio = new Folio(session, outside.tasks(), outside.dialogs(), outside.copies(), shell.theme());
+        mapView.lay(folio.plumeMap()::marks);
+        folio.plumeMap().changes().addListener((changes, before, after) -> mapView.repaint());
         this.section = new SectionModel(session, outside.tasks(), draft);
         SectionView sectionView = new SectionView(section, shell.theme());
         this.shelf =
