@@ -49,6 +49,7 @@ import org.seepledger.desktop.shell.ShellModel;
 import org.seepledger.desktop.shell.ShellView;
 import org.seepledger.desktop.shell.Slots;
 import org.seepledger.desktop.size.Magnifier;
+import org.seepledger.desktop.solute.KeptLook;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.theme.Dress;
 import org.seepledger.desktop.welcome.FolderDrop;
@@ -111,6 +112,7 @@ final class Assembly {
         draft.tool().addListener((tool, before, after) -> mapView.repaint());
         this.running = new RunningModel(outside.tasks()::running);
         this.folio = new Folio(session, outside.tasks(), outside.dialogs(), outside.copies(), shell.theme());
+        KeptLook.of(folio.look(), outside.settings());
         mapView.lay(folio.plumeMap()::marks);
         folio.plumeMap().changes().addListener((changes, before, after) -> mapView.repaint());
         this.section = new SectionModel(session, outside.tasks(), draft);
