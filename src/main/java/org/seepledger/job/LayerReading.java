@@ -54,19 +54,18 @@ final class LayerReading {
     }
 
     GridLayer layer(MapQuantity quantity, int layer, int interval, Window window, int stride) {
-        double[][] read = reduced(
-                2,
-                window,
-                stride,
-                band -> quantity.isConcentration()
-                        ? new ConcentrationReading(
-                                        solute(quantity.source()), aquifer.lengthUnit(), interval, layer, band)
-                                .of(quantity.kind())
-                        : new double[][] {
-                            new CellReading(aquifer, interval, layer, band).of(quantity),
-                            ConcentrationReading.none(band)
-                        });
+        double[][] read = reduced(2, window, stride, band -> cells(quantity, layer, interval, band));
         return new GridLayer(window, stride, read[0], read[1]);
+    }
+
+    /** Values of cells, row-major, row 0 northernmost, and the limits of those that are non-detects; NaN where there is none. */
+    double[][] cells(MapQuantity quantity, int layer, int interval, Window window) {
+        return quantity.isConcentration()
+                ? new ConcentrationReading(solute(quantity.source()), aquifer.lengthUnit(), interval, layer, window)
+                        .of(quantity.kind())
+                : new double[][] {
+                    new CellReading(aquifer, interval, layer, window).of(quantity), ConcentrationReading.none(window)
+                };
     }
 
     private Solute solute(String name) {

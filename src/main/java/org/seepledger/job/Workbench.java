@@ -439,8 +439,8 @@ public final class Workbench implements AutoCloseable {
      * @throws Cancelled if the work was stopped
      */
     public Profile profile(SectionLine line, Optional<MapQuantity> quantity, int interval, Progress progress) {
-        Optional<Profile.LayerValues> values =
-                quantity.map(shown -> (layer, window) -> new CellReading(aquifer(), interval, layer, window).of(shown));
+        Optional<Profile.LayerValues> values = quantity.map(shown -> (layer, window) ->
+                new LayerReading(aquifer(), solutes.solutes(), Progress.NONE).cells(shown, layer, interval, window)[0]);
         return gate.ask(progress, until -> Profile.along(line, aquifer(), interval, interval + 1, values, until));
     }
 

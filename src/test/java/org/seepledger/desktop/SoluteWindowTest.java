@@ -21,6 +21,7 @@ import org.seepledger.job.PlumeJob;
 import org.seepledger.job.Requests;
 import org.seepledger.progress.Progress;
 import org.seepledger.sketch.ControlLine;
+import org.seepledger.sketch.Place;
 import org.seepledger.sketch.RingAt;
 
 /** Looks at solutes over the sample, with the mouse and keyboard of the real window. */
@@ -136,7 +137,8 @@ class SoluteWindowTest {
         assertThat(line().places()).hasSize(3);
         window.robot.clickOn("#folio-transects");
         window.choose("#subject", "solvent");
-        drag(71, 58, 78, 52);
+        Place middle = line().places().get(1);
+        drag(middle.x(), middle.y(), 78, 52);
         window.settle();
         window.robot.clickOn("#transect-copy");
         Path lines = exported(KeyCode.CONTROL, KeyCode.SHIFT, KeyCode.L);

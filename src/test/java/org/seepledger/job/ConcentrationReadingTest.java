@@ -6,9 +6,14 @@ import static org.assertj.core.api.Assertions.within;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.List;
+import java.util.Optional;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.seepledger.picture.Profile;
+import org.seepledger.picture.SectionLine;
 import org.seepledger.progress.Progress;
+import org.seepledger.sketch.Place;
 
 /** Concentrations on a map: values in their own unit, non-detects without a value but with their limit. */
 class ConcentrationReadingTest {
@@ -16,7 +21,7 @@ class ConcentrationReadingTest {
     @TempDir
     private Path folder;
 
-    private GridLayer read(MapQuantity.Kind kind, int stride) throws IOException {
+    private Workbench open() throws IOException {
         Files.writeString(folder.resolve("c.csv"), """
                 row,col,instant,c
                 1,1,0,4
@@ -35,11 +40,19 @@ class ConcentrationReadingTest {
                  "solutes": [{"name": "salt", "unit": "ug/L", "concentration": {"file": "c.csv", "column": "c"},
                               "porosity": 0.2}]}
                 """);
-        try (Workbench bench = Workbench.open(folder)) {
-            MapQuantity quantity = bench.quantities().stream()
-                    .filter(each -> each.kind() == kind)
-                    .findFirst()
-                    .orElseThrow();
+        return Workbench.open(folder);
+    }
+
+    private static MapQuantity quantity(Workbench bench, MapQuantity.Kind kind) {
+        return bench.quantities().stream()
+                .filter(each -> each.kind() == kind)
+                .findFirst()
+                .orElseThrow();
+    }
+
+    private GridLayer read(MapQuantity.Kind kind, int stride) throws IOException {
+        try (Workbench bench = open()) {
+            MapQuantity quantity = quantity(bench, kind);
             assertThat(quantity.unit()).isEqualTo("ug/L");
             return bench.layer(quantity, 0, 0, bench.aquifer().grid().window(), stride, Progress.NONE);
         }
@@ -57,6 +70,19 @@ class ConcentrationReadingTest {
         GridLayer layer = read(MapQuantity.Kind.MEAN_CONCENTRATION, 1);
         assertThat(layer.values()).containsExactly(new double[] {6, 2.25, Double.NaN, 3}, within(1e-12));
         assertThat(layer.limits()).containsExactly(new double[] {Double.NaN, 1, 1.5, 2}, within(1e-12));
+    }
+
+    @Test
+    void aSectionHasTheSameValues() throws IOException {
+        try (Workbench bench = open()) {
+            SectionLine line = new SectionLine(List.of(new Place(0, 0.5), new Place(4, 0.5)));
+            Optional<MapQuantity> quantity = Optional.of(quantity(bench, MapQuantity.Kind.CONCENTRATION));
+            Profile profile = bench.profile(line, quantity, 0, Progress.NONE);
+            double[] along = profile.stretches().stream()
+                    .mapToDouble(stretch -> stretch.column().values()[0])
+                    .toArray();
+            assertThat(along).containsExactly(new double[] {8, Double.NaN, Double.NaN, 5}, within(1e-12));
+        }
     }
 
     @Test

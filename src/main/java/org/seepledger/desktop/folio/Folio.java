@@ -52,6 +52,7 @@ public final class Folio {
     private final HBox marks = new HBox();
     private final Reading reading;
     private final LiveBudget live;
+    private final SoluteLook look;
     private final LivePlume plumes;
     private final Session session;
     private final PlumeMapModel plumeMap;
@@ -74,7 +75,7 @@ public final class Folio {
         this.reading = new Reading(session);
         this.live = new LiveBudget(session, tasks);
         new FaceFeed(session, live, reading).begin();
-        SoluteLook look = new SoluteLook(session);
+        this.look = new SoluteLook(session);
         this.plumes = new LivePlume(session, look, tasks);
         this.plumeMap = new PlumeMapModel(session, look, plumes, tasks);
         MassReading masses = new MassReading(session, reading);
@@ -130,6 +131,11 @@ public final class Folio {
         solute.visibleProperty().bind(session.solute().isNotEmpty());
         water.visibleProperty().bind(solute.visibleProperty().not());
         return new StackPane(water, solute);
+    }
+
+    /** {@return how solutes are looked at} */
+    public SoluteLook look() {
+        return look;
     }
 
     /** {@return what the map shows of the solute looked at} */

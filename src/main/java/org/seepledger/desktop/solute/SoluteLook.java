@@ -49,7 +49,6 @@ public final class SoluteLook {
      */
     public SoluteLook(Session session) {
         this.session = session;
-        session.set().addListener((set, before, after) -> threshold.set(Optional.empty()));
         for (ObservableValue<?> cause : List.of(dispersion, threshold)) {
             cause.addListener((value, before, after) -> changes.set(changes.get() + 1));
         }

@@ -11,6 +11,7 @@ import org.junit.jupiter.api.Test;
 import org.seepledger.desktop.budget.LiveSet;
 import org.seepledger.desktop.chart.ChartModel;
 import org.seepledger.desktop.session.Drawing;
+import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.task.DirectTasks;
 import org.seepledger.picture.Box;
 import org.seepledger.picture.MapFrame;
@@ -151,6 +152,25 @@ class SoluteModelsTest {
         assertThat(depot.said.cautions()).anyMatch(caution -> caution.contains("safe to drink"));
         assertThat(depot.said.belongs()).startsWith("solvent: yard");
         assertThat(depot.said.answer().orElseThrow().points()).isNotEmpty();
+    }
+
+    @Test
+    void howItIsLookedAtIsKeptFromRunToRun() {
+        KeptLook.of(depot.look, depot.answers);
+        depot.look.type("100 ug/L");
+        depot.look.dispersion().set(true);
+        depot.look.track().set(SoluteLook.Track.OF_SET);
+        SoluteLook next = new SoluteLook(new Session());
+        KeptLook.of(next, depot.answers);
+        assertThat(next.threshold().get()).isEqualTo(depot.look.threshold().get());
+        assertThat(next.dispersion().get()).isTrue();
+        assertThat(next.track().get()).isEqualTo(SoluteLook.Track.OF_SET);
+        depot.answers.settings.put("solute.track", "sideways");
+        depot.answers.settings.put("solute.threshold", "much");
+        SoluteLook last = new SoluteLook(new Session());
+        KeptLook.of(last, depot.answers);
+        assertThat(last.track().get()).isEqualTo(SoluteLook.Track.OF_PRISM);
+        assertThat(last.threshold().get()).isEmpty();
     }
 
     /** Masses through sides in place of water, in the ledger's unit. */
