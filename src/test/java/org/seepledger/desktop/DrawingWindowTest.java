@@ -31,8 +31,15 @@ class DrawingWindowTest {
 
     @BeforeEach
     void open() throws IOException {
+        OpenWindow.copy(Path.of("sample-aquifers/valley"), folder);
         window = new OpenWindow(1600, 1000);
-        window.openValley(folder);
+        openSet();
+    }
+
+    private void openSet() {
+        window.openSet(folder);
+        window.await(() -> window.assembly().map().values().scale().get().isPresent());
+        window.settle();
     }
 
     @AfterEach
@@ -45,7 +52,7 @@ class DrawingWindowTest {
     }
 
     private void type(KeyCode... keys) {
-        window.robot.press(keys).release(keys);
+        window.type(keys);
     }
 
     private Drawing drawing() {
@@ -128,7 +135,7 @@ class DrawingWindowTest {
         Drawing drawn = drawing();
         window.close();
         window = new OpenWindow(1600, 1000);
-        window.openMap(folder);
+        openSet();
         assertThat(drawing()).isEqualTo(drawn);
         assertThat(window.robot.lookup("#status").queryAs(Label.class).getText())
                 .contains("are back");

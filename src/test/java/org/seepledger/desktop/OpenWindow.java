@@ -81,35 +81,6 @@ public final class OpenWindow implements AutoCloseable {
         await(() -> assembly.session().set().get().isPresent());
     }
 
-    /** Opens a copy of the valley, in which a test may write, and waits until its map is there. */
-    void openValley(Path copy) throws IOException {
-        try (Stream<Path> sample = Files.list(Path.of("sample-aquifers/valley"))) {
-            for (Path file : sample.toList()) {
-                Files.copy(file, copy.resolve(file.getFileName()));
-            }
-        }
-        openMap(copy);
-    }
-
-    /** Opens a set and waits until its map is there. */
-    void openMap(Path folder) {
-        openSet(folder);
-        await(() -> assembly.map().values().scale().get().isPresent());
-        settle();
-    }
-
-    /** Where a node begins on the screen. */
-    static Point2D origin(Node node) {
-        Bounds bounds = node.localToScreen(node.getBoundsInLocal());
-        return new Point2D(bounds.getMinX(), bounds.getMinY());
-    }
-
-    /** Where a place of the map is on the screen. */
-    Point2D onMap(double mapX, double mapY) {
-        Camera camera = assembly.map().camera().get();
-        return origin(robot.lookup("#map-canvas").query()).add(camera.x(mapX), camera.y(mapY));
-    }
-
     /** Waits until something holds. */
     public void await(BooleanSupplier condition) {
         try {
@@ -132,6 +103,28 @@ public final class OpenWindow implements AutoCloseable {
         }
         robot.type(KeyCode.ENTER);
         await(() -> value.equals(box.getValue()));
+    }
+
+    /** Where a place of the map is on the screen. */
+    Point2D onMap(double mapX, double mapY) {
+        Node canvas = robot.lookup("#map-canvas").query();
+        Bounds bounds = canvas.localToScreen(canvas.getBoundsInLocal());
+        Camera camera = assembly().map().camera().get();
+        return new Point2D(bounds.getMinX() + camera.x(mapX), bounds.getMinY() + camera.y(mapY));
+    }
+
+    /** Presses keys together, and lets them go. */
+    void type(KeyCode... keys) {
+        robot.press(keys).release(keys);
+    }
+
+    /** Copies a sample, to be changed. */
+    static void copy(Path sample, Path folder) throws IOException {
+        try (Stream<Path> files = Files.list(sample)) {
+            for (Path file : files.toList()) {
+                Files.copy(file, folder.resolve(file.getFileName()));
+            }
+        }
     }
 
     /** Lets the window come to rest. */

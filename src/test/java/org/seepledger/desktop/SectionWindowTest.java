@@ -8,6 +8,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Optional;
 import javafx.geometry.Point2D;
+import javafx.scene.Node;
 import javafx.scene.control.Label;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.MouseButton;
@@ -34,8 +35,11 @@ class SectionWindowTest {
 
     @BeforeEach
     void open() throws IOException {
+        OpenWindow.copy(Path.of("sample-aquifers/valley"), folder);
         window = new OpenWindow(1600, 1000);
-        window.openValley(folder);
+        window.openSet(folder);
+        window.await(() -> window.assembly().map().values().scale().get().isPresent());
+        window.settle();
     }
 
     @AfterEach
@@ -52,8 +56,8 @@ class SectionWindowTest {
     }
 
     private Point2D inSection(double along, double elevation) {
-        return OpenWindow.origin(window.robot.lookup("#section-canvas").query())
-                .add(frame().x(along), frame().y(elevation));
+        Node canvas = window.robot.lookup("#section-canvas").query();
+        return canvas.localToScreen(frame().x(along), frame().y(elevation));
     }
 
     private Body.Spot spot() {
@@ -61,7 +65,7 @@ class SectionWindowTest {
     }
 
     private void type(KeyCode... keys) {
-        window.robot.press(keys).release(keys);
+        window.type(keys);
     }
 
     private Drawing drawing() {

@@ -4,21 +4,19 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import java.io.IOException;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
+import javafx.geometry.Bounds;
 import javafx.geometry.Point2D;
-import javafx.geometry.Pos;
+import javafx.scene.Node;
 import javafx.scene.control.Label;
-import javafx.scene.input.ClipboardContent;
 import javafx.scene.input.KeyCode;
-import javafx.scene.input.TransferMode;
-import javafx.scene.layout.Pane;
-import javafx.scene.layout.StackPane;
-import javafx.scene.shape.Rectangle;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.seepledger.desktop.map.Camera;
 import org.seepledger.sketch.Drawing;
 
 /** Shapes made of others, by hand in the real window: split, merged, with islands and buffers. */
@@ -31,8 +29,15 @@ class ShapesWindowTest {
 
     @BeforeEach
     void open() throws IOException {
+        try (var sample = Files.list(Path.of("sample-aquifers/valley"))) {
+            for (Path file : sample.toList()) {
+                Files.copy(file, folder.resolve(file.getFileName()));
+            }
+        }
         window = new OpenWindow(1600, 1000);
-        window.openValley(folder);
+        window.openSet(folder);
+        window.await(() -> window.assembly().map().values().scale().get().isPresent());
+        window.settle();
     }
 
     @AfterEach
@@ -41,7 +46,10 @@ class ShapesWindowTest {
     }
 
     private Point2D at(double mapX, double mapY) {
-        return window.onMap(mapX, mapY);
+        Node canvas = window.robot.lookup("#map-canvas").query();
+        Bounds bounds = canvas.localToScreen(canvas.getBoundsInLocal());
+        Camera camera = window.assembly().map().camera().get();
+        return new Point2D(bounds.getMinX() + camera.x(mapX), bounds.getMinY() + camera.y(mapY));
     }
 
     private Drawing drawing() {
@@ -142,21 +150,8 @@ class ShapesWindowTest {
                 window.assembly().session().set().get().orElseThrow().path().endsWith("terrace"));
     }
 
-    /** Drags a folder with the mouse from a mark that the test puts into the window's corner. */
-    private void drop(String pane, Path folder) {
-        Rectangle mark = new Rectangle(24, 24);
-        mark.setOnDragDetected(drag -> {
-            ClipboardContent content = new ClipboardContent();
-            content.putFiles(List.of(folder.toAbsolutePath().toFile()));
-            mark.startDragAndDrop(TransferMode.ANY).setContent(content);
-            drag.consume();
-        });
-        Pane root = (Pane) window.assembly().scene().getRoot();
-        window.robot.interact(() -> {
-            root.getChildren().add(mark);
-            StackPane.setAlignment(mark, Pos.BOTTOM_CENTER);
-        });
-        window.robot.drag(mark).dropTo(pane);
-        window.robot.interact(() -> root.getChildren().remove(mark));
+    private void drop(String pane, Path dropped) {
+        window.robot.interact(
+                () -> DraggedFolder.dropOn(window.robot.lookup(pane).query(), dropped));
     }
 }
