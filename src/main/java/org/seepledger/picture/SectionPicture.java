@@ -27,6 +27,7 @@ public final class SectionPicture {
     private static final double RIGHT = 116;
     private static final double LEGEND = 360;
     private static final double GAP = 4;
+    private static final double HINT = 0.3;
     private static final double SMALL = SectionSheet.SMALL;
 
     /** Wells are shown up to this share of the line's length beside it, unless somebody says otherwise. */
@@ -207,8 +208,9 @@ public final class SectionPicture {
                 : Optional.empty();
     }
 
-    private static Fill fill(double opacity) {
-        return new Fill(Ink.Token.PRISM, opacity, Texture.RISING);
+    /** Over colours, which have a meaning, a body is but hinted at. */
+    private Fill fill(double opacity) {
+        return new Fill(Ink.Token.PRISM, section.colours().isPresent() ? HINT * opacity : opacity, Texture.RISING);
     }
 
     private String description() {
