@@ -23,6 +23,7 @@ public final class DraftHand implements Hand {
     private final SelectHand select;
     private final StrokeHand stroke;
     private final SpanHand span;
+    private Optional<Touch> last = Optional.empty();
 
     /**
      * Makes the hand.
@@ -55,6 +56,7 @@ public final class DraftHand implements Hand {
 
     @Override
     public boolean press(Touch touch) {
+        begin(touch);
         if (tool() == Tool.SELECT) {
             return select.press(touch);
         }
@@ -68,13 +70,18 @@ public final class DraftHand implements Hand {
         return true;
     }
 
+    private void begin(Touch touch) {
+        model.forgetRefusal();
+        last = Optional.of(touch);
+    }
+
     private void merge(Touch touch) {
         Place pointer = new Place(touch.x(), touch.y());
         Optional<String> other = Hit.at(model.drawing(), pointer, Nearness.ofPixel(touch.pixel()), Optional.empty())
                 .map(Hit::shape);
         Optional<String> one = model.selected().map(Shape::name);
         if (other.isEmpty() || other.equals(one)) {
-            model.session().status().set(Words.of("merge.other"));
+            model.refuse(Words.of("merge.other"));
             return;
         }
         if (model.step("step.merge", drawing -> drawing.merge(one.orElseThrow(), other.get(), model.near()))) {
@@ -84,6 +91,7 @@ public final class DraftHand implements Hand {
 
     @Override
     public void drag(Touch touch) {
+        last = Optional.of(touch);
         if (tool() == Tool.SELECT) {
             select.drag(touch);
         } else if (isSpan()) {
@@ -115,6 +123,7 @@ public final class DraftHand implements Hand {
 
     @Override
     public void doubleClick(Touch touch) {
+        begin(touch);
         if (tool() == Tool.SELECT) {
             select.doubleClick(touch);
         } else if (isStroke()) {
@@ -143,6 +152,7 @@ public final class DraftHand implements Hand {
             marks.stroke(span.places(), Optional.empty(), true);
         }
         snapper.snap().ifPresent(marks::snap);
+        last.ifPresent(touch -> marks.refusal(model.refusal().get(), new Place(touch.x(), touch.y())));
         return marks.list();
     }
 
@@ -198,10 +208,11 @@ public final class DraftHand implements Hand {
      * @return whether it was taken; else the status line says why not
      */
     public boolean type(String text) {
+        last = Optional.empty();
         try {
             return tool() == Tool.CIRCLE ? radius(text) : place(Place.typed(text));
         } catch (Refusal refusal) {
-            model.session().status().set(refusal.getMessage());
+            model.refuse(refusal.getMessage());
             return false;
         }
     }
@@ -234,8 +245,9 @@ public final class DraftHand implements Hand {
      * @param name its name; empty to let them count under their own
      */
     public void nameBoundary(String name) {
+        last = Optional.empty();
         if (pick.sides().isEmpty()) {
-            model.session().status().set(Words.of("boundary.sides"));
+            model.refuse(Words.of("boundary.sides"));
             return;
         }
         Optional<String> boundary = Optional.of(name.strip()).filter(given -> !given.isEmpty());

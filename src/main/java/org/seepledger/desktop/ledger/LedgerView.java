@@ -97,7 +97,7 @@ public final class LedgerView extends BorderPane {
         TableColumn<LedgerRow, LedgerRow> column = new TableColumn<>();
         column.setGraphic(header("ledger.item", Order.AS_DRAWN));
         column.setMinWidth(110);
-        column.setPrefWidth(136);
+        column.setPrefWidth(150);
         return shown(column, new NameCell.Factory());
     }
 
@@ -105,8 +105,8 @@ public final class LedgerView extends BorderPane {
         TableColumn<LedgerRow, LedgerRow> column = new TableColumn<>();
         column.setGraphic(header(words, order));
         column.getStyleClass().add("sl-numbers");
-        column.setMinWidth(84);
-        column.setPrefWidth(92);
+        column.setMinWidth(82);
+        column.setPrefWidth(86);
         return shown(column, new NumberCell.Factory(value, model));
     }
 
@@ -126,8 +126,8 @@ public final class LedgerView extends BorderPane {
 
     private TableColumn<LedgerRow, LedgerRow> scaleColumn() {
         TableColumn<LedgerRow, LedgerRow> column = new TableColumn<>();
-        column.setMinWidth(48);
-        column.setPrefWidth(56);
+        column.setMinWidth(40);
+        column.setPrefWidth(44);
         return shown(column, new ScaleCell.Factory(model));
     }
 

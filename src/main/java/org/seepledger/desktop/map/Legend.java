@@ -15,6 +15,7 @@ import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 import org.seepledger.desktop.paint.MarkPainter;
 import org.seepledger.desktop.paint.SharpCanvas;
+import org.seepledger.desktop.pane.FieldFault;
 import org.seepledger.desktop.theme.Theme;
 import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.desktop.words.Words;
@@ -37,6 +38,7 @@ final class Legend extends VBox {
     private final SharpCanvas bar = new SharpCanvas(this::show);
     private final TextField from = field("range-from");
     private final TextField to = field("range-to");
+    private final FieldFault fault = new FieldFault("range-fault");
     private final HBox ends = new HBox(5);
 
     Legend(ValuesModel model, ObservableValue<Theme> theme) {
@@ -61,7 +63,8 @@ final class Legend extends VBox {
         ends.setAlignment(Pos.CENTER_LEFT);
         ends.setVisible(false);
         ends.managedProperty().bind(ends.visibleProperty());
-        getChildren().addAll(title, bar, ends);
+        fault.visibleProperty().bind(ends.visibleProperty());
+        getChildren().addAll(title, bar, ends, fault);
         setMaxSize(USE_PREF_SIZE, USE_PREF_SIZE);
         for (TextField field : List.of(from, to)) {
             field.setOnAction(entered -> take());
@@ -91,7 +94,7 @@ final class Legend extends VBox {
         return field;
     }
 
-    /** What cannot be taken is put back as it was. */
+    /** What cannot be taken stays as it was typed, with the reason below. */
     private void take() {
         Optional<ValueScale> scale = model.scale().get();
         if (scale.isEmpty()) {
@@ -102,7 +105,7 @@ final class Legend extends VBox {
             return;
         }
         if (!model.range(number(from.getText()), number(to.getText()))) {
-            show();
+            fault.say(Words.of("map.range.refused"));
         }
     }
 
@@ -128,6 +131,7 @@ final class Legend extends VBox {
     }
 
     private void show() {
+        fault.say("");
         Optional<ValueScale> scale = model.scale().get();
         setVisible(scale.isPresent() && model.view().get().isPresent());
         if (isVisible()) {
