@@ -62,7 +62,8 @@ public final class Folio {
         new FaceFeed(session, live, reading).begin();
         SoluteLook look = new SoluteLook(session);
         this.plumes = new LivePlume(session, look, tasks);
-        this.ledger = new LedgerModel(session, live, reading, plumes, new MassReading(session, reading), copies);
+        MassReading masses = new MassReading(session, reading);
+        this.ledger = new LedgerModel(session, live, reading, plumes, masses, copies);
         pages.setId("folio");
         pages.getStyleClass().add("sl-folio");
         marks.getStyleClass().add("sl-marks");
@@ -72,7 +73,7 @@ public final class Folio {
         add("folio.exchange", new ExchangeView(new ExchangeModel(session, live, reading, copies), theme));
         // Before the model, which takes the question away.
         session.asked().addListener((asked, before, after) -> after.ifPresent(row -> open(ORIGIN)));
-        add("folio.origin", new OriginView(new OriginModel(session, reading, tasks, dialogs, copies)));
+        add("folio.origin", new OriginView(new OriginModel(session, reading, masses, look, tasks, dialogs, copies)));
         marks.getChildren().add(new SubjectBox(session));
         pages.setTop(marks);
         chosen.selectToggle(chosen.getToggles().get(0));
