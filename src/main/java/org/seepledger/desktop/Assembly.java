@@ -50,6 +50,7 @@ import org.seepledger.desktop.shell.ShellModel;
 import org.seepledger.desktop.shell.ShellView;
 import org.seepledger.desktop.shell.Slots;
 import org.seepledger.desktop.size.Magnifier;
+import org.seepledger.desktop.solute.KeptLook;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.theme.Dress;
 import org.seepledger.desktop.welcome.FolderDrop;
@@ -110,8 +111,12 @@ final class Assembly {
         this.mapView = new MapView(map, ground, outside.tasks(), shell.theme(), hand, tray);
         draft.version().addListener((version, before, after) -> mapView.repaint());
         draft.tool().addListener((tool, before, after) -> mapView.repaint());
+        tray.whenLeft(mapView::focus);
         this.running = new RunningModel(outside.tasks()::running);
         this.folio = new Folio(session, outside.tasks(), outside.dialogs(), outside.copies(), shell.theme());
+        KeptLook.of(folio.look(), outside.settings());
+        mapView.lay(folio.plumeMap()::marks);
+        folio.plumeMap().changes().addListener((changes, before, after) -> mapView.repaint());
         this.section = new SectionModel(session, outside.tasks(), draft);
         SectionView sectionView = new SectionView(section, shell.theme());
         this.shelf =
