@@ -2,8 +2,6 @@ package org.seepledger.desktop.shell;
 
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
-import javafx.scene.control.ScrollPane;
-import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.ledger.Disclaimer;
@@ -24,14 +22,11 @@ final class CautionPage extends VBox {
             line.setMinHeight(USE_PREF_SIZE);
             sentences.getChildren().add(line);
         });
-        ScrollPane scroll = new ScrollPane(sentences);
-        scroll.setFitToWidth(true);
-        setVgrow(scroll, Priority.ALWAYS);
         Button done = new Button(Words.of("close"));
         done.setDefaultButton(true);
         done.setCancelButton(true);
         done.setOnAction(pressed -> close.run());
-        getChildren().addAll(title, scroll, done);
+        getChildren().addAll(title, sentences, done);
     }
 
     @Override
