@@ -132,13 +132,13 @@ final class SetText {
     private List<Object> layers() {
         List<Optional<Bound>> tops = binder.perLayer(Role.TOP, Optional.empty());
         List<Optional<Bound>> bottoms = binder.perLayer(Role.BOTTOM, Optional.of(Topic.BOTTOM));
-        List<String> names = LayerWishes.names(plan);
         List<Boolean> waterTables = LayerWishes.waterTables(plan, binder.layers());
         List<Object> layers = new ArrayList<>();
         for (int layer = 0; layer < binder.layers(); layer++) {
             Map<String, Object> json = new LinkedHashMap<>();
-            if (layer < names.size() && !names.get(layer).isEmpty()) {
-                json.put("name", names.get(layer));
+            String name = LayerWishes.name(plan, layer + 1);
+            if (!name.isEmpty()) {
+                json.put("name", name);
             }
             Optional<Bound> top = tops.get(layer);
             if (layer == 0 && top.isEmpty()) {

@@ -15,22 +15,24 @@ final class SourceText {
     private final Binder binder;
     private final Shelf shelf;
     private final Consumer<Finding> findings;
+    private final Carried carried;
 
     SourceText(Plan plan, Binder binder, Shelf shelf, Consumer<Finding> findings) {
         this.plan = plan;
         this.binder = binder;
         this.shelf = shelf;
         this.findings = findings;
+        this.carried = new Carried(binder, findings);
     }
 
     List<Object> sources() {
         List<Object> sources = new ArrayList<>();
-        for (Role role : List.of(Role.AREAL, Role.POINTS, Role.CELLS)) {
-            binder.parts(role).forEach(part -> add(sources, part));
-        }
         String recharge = plan.wishes().of(Topic.RECHARGE);
         if (!recharge.isEmpty()) {
             typed(recharge).ifPresent(sources::add);
+        }
+        for (Role role : List.of(Role.AREAL, Role.POINTS, Role.CELLS)) {
+            binder.parts(role).forEach(part -> add(sources, part));
         }
         return sources;
     }
@@ -63,24 +65,9 @@ final class SourceText {
         }
         rate(part).ifPresent(rate -> {
             source.put("rate", rate);
-            carried(part).ifPresent(carried -> source.put("concentration", carried));
+            carried.by(part).ifPresent(concentrations -> source.put("concentration", concentrations));
             sources.add(source);
         });
-    }
-
-    /** Concentrations in the table of a source are those of what it adds. */
-    private Optional<Object> carried(Part source) {
-        Map<String, Object> carried = new LinkedHashMap<>();
-        for (Part part : binder.parts(Role.CONCENTRATION)) {
-            if (part.item().equals(source.item())) {
-                binder.joined(
-                                "concentration of " + part.use().name(),
-                                Optional.empty(),
-                                binder.perLayer(List.of(part), Optional.empty()))
-                        .ifPresent(json -> carried.put(part.use().name(), json));
-            }
-        }
-        return carried.isEmpty() ? Optional.empty() : Optional.of(carried);
     }
 
     /** Values that tell no layers apart enter the uppermost active cell; those of one layer are none in the others. */

@@ -117,7 +117,10 @@ public final class PlumeJob {
         List<String> files = out.written();
         out.publish();
         String summary = PlumeSummary.of(aquifer, results, units, subject.warnings(), subject.notes());
-        return new PlumeOutcome(summary, worst(plumes), files);
+        return new PlumeOutcome(
+                summary,
+                WorstClosure.of(results.stream().flatMap(result -> result.budget().periods().stream())),
+                files);
     }
 
     private List<Solute> solutes() {
@@ -198,14 +201,5 @@ public final class PlumeJob {
         request.panels().ifPresent(file -> options.put("panels", file.toString()));
         options.put("clip", String.valueOf(request.clip()));
         return options;
-    }
-
-    private double worst(List<Plume> plumes) {
-        return plumes.stream()
-                .flatMap(plume -> periods.stream().map(plume.ledger()::budget))
-                .mapToDouble(budget -> Math.abs(budget.totals().closureError()))
-                .filter(error -> !Double.isNaN(error))
-                .max()
-                .orElse(Double.NaN);
     }
 }

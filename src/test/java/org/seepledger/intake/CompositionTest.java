@@ -301,4 +301,18 @@ class CompositionTest {
                 .doesNotContain("leak.csv");
         assertThat(composition.set().get("sources").toString()).contains("concentration={chloride=");
     }
+
+    @Test
+    void layersAreNamedAfterWhatTheirBottomsAreTheBottomsOf() {
+        loose.raster("ground.tif", 30)
+                .raster("gravel_base.tif", 20)
+                .raster("Clay bottom.tif", 10)
+                .raster("bedrock.tif", 0);
+        Composition composition = Composition.of(loose.plan(), false);
+        assertThat(composition.set().get("layers").toString())
+                .contains("name=Gravel", "name=Clay")
+                .doesNotContain("name=Bedrock");
+        Composition said = Composition.of(LooseFolder.said(loose.plan(), Topic.LAYERS, "Sand, Silt, Rock"), false);
+        assertThat(said.set().get("layers").toString()).contains("name=Sand", "name=Silt", "name=Rock");
+    }
 }

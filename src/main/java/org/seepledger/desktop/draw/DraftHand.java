@@ -24,6 +24,7 @@ public final class DraftHand implements Hand {
     private final StrokeHand stroke;
     private final SpanHand span;
     private final LineHand line;
+    private Optional<Touch> last = Optional.empty();
 
     /**
      * Makes the hand.
@@ -61,6 +62,7 @@ public final class DraftHand implements Hand {
 
     @Override
     public boolean press(Touch touch) {
+        begin(touch);
         if (tool() == Tool.SELECT) {
             line.letGo();
             return !select.isOnVertex(touch) && line.press(touch) || select.press(touch);
@@ -75,13 +77,18 @@ public final class DraftHand implements Hand {
         return true;
     }
 
+    private void begin(Touch touch) {
+        model.forgetRefusal();
+        last = Optional.of(touch);
+    }
+
     private void merge(Touch touch) {
         Place pointer = new Place(touch.x(), touch.y());
         Optional<String> other = Hit.at(model.drawing(), pointer, Nearness.ofPixel(touch.pixel()), Optional.empty())
                 .map(Hit::shape);
         Optional<String> one = model.selected().map(Shape::name);
         if (other.isEmpty() || other.equals(one)) {
-            model.session().status().set(Words.of("merge.other"));
+            model.refuse(Words.of("merge.other"));
             return;
         }
         if (model.step("step.merge", drawing -> drawing.merge(one.orElseThrow(), other.get(), model.near()))) {
@@ -91,6 +98,7 @@ public final class DraftHand implements Hand {
 
     @Override
     public void drag(Touch touch) {
+        last = Optional.of(touch);
         if (line.isHeld()) {
             line.drag(touch);
         } else if (tool() == Tool.SELECT) {
@@ -127,6 +135,7 @@ public final class DraftHand implements Hand {
 
     @Override
     public void doubleClick(Touch touch) {
+        begin(touch);
         if (tool() == Tool.SELECT) {
             select.doubleClick(touch);
         } else if (isStroke()) {
@@ -156,6 +165,7 @@ public final class DraftHand implements Hand {
             marks.stroke(span.places(), Optional.empty(), true);
         }
         snapper.snap().ifPresent(marks::snap);
+        last.ifPresent(touch -> marks.refusal(model.refusal().get(), new Place(touch.x(), touch.y())));
         return marks.list();
     }
 
@@ -212,10 +222,11 @@ public final class DraftHand implements Hand {
      * @return whether it was taken; else the status line says why not
      */
     public boolean type(String text) {
+        last = Optional.empty();
         try {
             return tool() == Tool.CIRCLE ? radius(text) : place(Place.typed(text));
         } catch (Refusal refusal) {
-            model.session().status().set(refusal.getMessage());
+            model.refuse(refusal.getMessage());
             return false;
         }
     }
@@ -255,8 +266,9 @@ public final class DraftHand implements Hand {
      * @param name its name; empty to let them count under their own
      */
     public void nameBoundary(String name) {
+        last = Optional.empty();
         if (pick.sides().isEmpty()) {
-            model.session().status().set(Words.of("boundary.sides"));
+            model.refuse(Words.of("boundary.sides"));
             return;
         }
         Optional<String> boundary = Optional.of(name.strip()).filter(given -> !given.isEmpty());

@@ -26,6 +26,9 @@ final class DraftMarks {
     private static final double ROOMY = 22;
 
     private static final double GLYPH = 7;
+    private static final double NEAR = 14;
+    private static final double LETTERS = 12;
+    private static final int WIDEST = 42;
 
     private static final double ARROW = 14;
 
@@ -38,6 +41,32 @@ final class DraftMarks {
 
     List<Mark> list() {
         return marks;
+    }
+
+    /** Why something was refused, where it was tried. */
+    void refusal(String why, Place place) {
+        double y = y(place) - NEAR;
+        for (String line : lines(why)) {
+            marks.add(Mark.Text.of(x(place) + NEAR, y, line, LETTERS, Mark.Anchor.START)
+                    .in(Ink.Token.LOSS)
+                    .haloed()
+                    .strong());
+            y += 1.3 * LETTERS;
+        }
+    }
+
+    private static List<String> lines(String why) {
+        List<String> lines = new ArrayList<>();
+        StringBuilder line = new StringBuilder();
+        for (String word : why.split(" ")) {
+            if (line.length() + word.length() > WIDEST && !line.isEmpty()) {
+                lines.add(line.toString().strip());
+                line.setLength(0);
+            }
+            line.append(word).append(' ');
+        }
+        lines.add(line.toString().strip());
+        return lines;
     }
 
     void shape(Shape shape, Pick pick) {

@@ -8,6 +8,8 @@ import java.util.function.UnaryOperator;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyLongProperty;
 import javafx.beans.property.ReadOnlyLongWrapper;
+import javafx.beans.property.ReadOnlyStringProperty;
+import javafx.beans.property.ReadOnlyStringWrapper;
 import javafx.beans.property.SimpleObjectProperty;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.GriddedValues;
@@ -31,6 +33,7 @@ public final class DraftModel implements Drafting {
     private final Session session;
     private final ObjectProperty<Tool> tool = new SimpleObjectProperty<>(Tool.SELECT);
     private final ReadOnlyLongWrapper version = new ReadOnlyLongWrapper();
+    private final ReadOnlyStringWrapper refusal = new ReadOnlyStringWrapper("");
     private History history = new History(Drawing.EMPTY);
     private Map<Limit.Surface, GriddedValues> surfaces = Map.of();
     private Drawing saved = Drawing.EMPTY;
@@ -179,11 +182,28 @@ public final class DraftModel implements Drafting {
     private boolean tried(Runnable edit) {
         try {
             edit.run();
+            refusal.set("");
             return true;
-        } catch (Refusal refusal) {
-            session.status().set(refusal.getMessage());
+        } catch (Refusal refused) {
+            refuse(refused.getMessage());
             return false;
         }
+    }
+
+    /** Tells why something is refused, in the status line and beside what it is about. */
+    void refuse(String why) {
+        refusal.set(why);
+        session.status().set(why);
+    }
+
+    /** {@return why the last step was refused; empty if it was taken} */
+    ReadOnlyStringProperty refusal() {
+        return refusal.getReadOnlyProperty();
+    }
+
+    /** Something new is begun. */
+    void forgetRefusal() {
+        refusal.set("");
     }
 
     /** Undoes a step. */
@@ -253,9 +273,10 @@ public final class DraftModel implements Drafting {
             return;
         }
         if (chosen.needsPrism() && selected().isEmpty()) {
-            session.status().set(Words.of("tool.needs"));
+            refuse(Words.of("tool.needs"));
             return;
         }
+        refusal.set("");
         tool.set(chosen);
         session.status().set(chosen.hint());
     }

@@ -23,9 +23,9 @@ public final class LedgerView extends BorderPane {
 
     private static final KeyCombination COPY = new KeyCodeCombination(KeyCode.C, KeyCombination.SHORTCUT_DOWN);
     private static final PseudoClass HEADING = PseudoClass.getPseudoClass("heading");
-    private static final double NUMBER = 92;
+    private static final double NUMBER = 86;
     private static final double LONG_NUMBER = 100;
-    private static final double NAME = 136;
+    private static final double NAME = 150;
     private static final double SHORT_NAME = 122;
     private static final PseudoClass TOTAL = PseudoClass.getPseudoClass("total");
 
@@ -120,7 +120,7 @@ public final class LedgerView extends BorderPane {
         TableColumn<LedgerRow, LedgerRow> column = new TableColumn<>();
         column.setGraphic(header(words, order));
         column.getStyleClass().add("sl-numbers");
-        column.setMinWidth(84);
+        column.setMinWidth(82);
         column.setPrefWidth(NUMBER);
         return shown(column, new NumberCell.Factory(value, model));
     }
@@ -140,8 +140,8 @@ public final class LedgerView extends BorderPane {
 
     private TableColumn<LedgerRow, LedgerRow> scaleColumn() {
         TableColumn<LedgerRow, LedgerRow> column = new TableColumn<>();
-        column.setMinWidth(48);
-        column.setPrefWidth(56);
+        column.setMinWidth(40);
+        column.setPrefWidth(44);
         return shown(column, new ScaleCell.Factory(model));
     }
 

@@ -16,6 +16,7 @@ import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 import org.seepledger.desktop.paint.MarkPainter;
 import org.seepledger.desktop.paint.SharpCanvas;
+import org.seepledger.desktop.pane.FieldFault;
 import org.seepledger.desktop.theme.Theme;
 import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.desktop.words.Words;
@@ -38,6 +39,7 @@ final class Legend extends VBox {
     private final SharpCanvas bar = new SharpCanvas(this::show);
     private final TextField from = field("range-from");
     private final TextField to = field("range-to");
+    private final FieldFault fault = new FieldFault("range-fault");
     private final HBox ends = new HBox(5);
 
     Legend(ValuesModel model, ObservableValue<Theme> theme) {
@@ -63,7 +65,8 @@ final class Legend extends VBox {
         ends.setAlignment(Pos.CENTER_LEFT);
         ends.setVisible(false);
         ends.managedProperty().bind(ends.visibleProperty());
-        getChildren().addAll(title, bar, new NonDetectKey(model, theme), ends);
+        fault.visibleProperty().bind(ends.visibleProperty());
+        getChildren().addAll(title, bar, new NonDetectKey(model, theme), ends, fault);
         setMaxSize(USE_PREF_SIZE, USE_PREF_SIZE);
         for (TextField field : List.of(from, to)) {
             field.setOnAction(entered -> take());
@@ -111,7 +114,7 @@ final class Legend extends VBox {
         return field;
     }
 
-    /** What cannot be taken is put back as it was. */
+    /** What cannot be taken stays as it was typed, with the reason below. */
     private void take() {
         Optional<ValueScale> scale = model.scale().get();
         if (scale.isEmpty()) {
@@ -122,7 +125,7 @@ final class Legend extends VBox {
             return;
         }
         if (!model.range(number(from.getText()), number(to.getText()))) {
-            show();
+            fault.say(Words.of(model.isLogarithmic() ? "map.range.log" : "map.range.refused"));
         }
     }
 
@@ -148,6 +151,7 @@ final class Legend extends VBox {
     }
 
     private void show() {
+        fault.say("");
         Optional<ValueScale> scale = model.scale().get();
         setVisible(scale.isPresent() && model.view().get().isPresent());
         if (isVisible()) {

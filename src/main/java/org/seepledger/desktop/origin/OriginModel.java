@@ -163,11 +163,16 @@ public final class OriginModel {
         answer = Optional.of(number);
         Wording wording = Wording.typeset(number.units());
         String unit = wording.unit(number.units().rate());
-        sum.set(Words.of("origin.sum", shown(number.net()), unit, number.count(), number.sum())
+        sum.set(Words.of("origin.sum", shown(number.net()), unit, number.count(), exact(number.sum()))
                 + volume(number, wording));
         fill();
         showRemark();
         state.set(PaneState.READY);
+    }
+
+    /** All digits, with a true minus. */
+    private static String exact(double number) {
+        return String.valueOf(number).replace('-', '\u2212');
     }
 
     /** What the ledger shows where it shows volumes. */

@@ -18,7 +18,6 @@ import org.seepledger.desktop.action.Action;
 import org.seepledger.desktop.pane.StatePane;
 import org.seepledger.desktop.theme.Theme;
 import org.seepledger.desktop.words.Words;
-import org.seepledger.picture.SectionFrame;
 import org.seepledger.sketch.Lid;
 
 /** The pane of the section. */
@@ -50,13 +49,15 @@ public final class SectionView extends BorderPane {
         setCenter(new StatePane(new StackPane(canvas, ring), model.state())
                 .withAction(Words.of("section.draw"), model::draw));
         new SectionMouse(model, canvas).begin();
-        model.frame().addListener((frame, before, after) -> after.ifPresent(this::show));
+        model.frame()
+                .addListener((frame, before, after) -> put(
+                        times, after.map(seen -> shorter(seen.exaggeration())).orElse("")));
         model.session().drawing().addListener((drawing, before, after) -> showLids());
         model.session().selected().addListener((selected, before, after) -> showLids());
         showLids();
         model.section()
-                .addListener(
-                        (section, before, after) -> after.ifPresent(shown -> put(within, shorter(shown.within()))));
+                .addListener((section, before, after) ->
+                        put(within, after.map(shown -> shorter(shown.within())).orElse("")));
     }
 
     /** {@return what is typed and pressed above the section} */
@@ -156,10 +157,6 @@ public final class SectionView extends BorderPane {
     private void focusTyped() {
         boolean isBottom = model.lids().chosen().equals(Optional.of(Lid.BOTTOM));
         (isBottom ? bottom : top).requestFocus();
-    }
-
-    private void show(SectionFrame frame) {
-        put(times, shorter(frame.exaggeration()));
     }
 
     /** {@return what can be done with the section} */

@@ -19,8 +19,8 @@ import org.seepledger.io.result.MassUnits;
 import org.seepledger.job.RecordPlume;
 import org.seepledger.ledger.Period;
 import org.seepledger.ledger.SoluteCautions;
+import org.seepledger.report.Answer;
 import org.seepledger.report.PlumeResult;
-import org.seepledger.report.SoluteAnswer;
 import org.seepledger.report.Wording;
 
 /** What the record of the solute looked at says in sentences, the same as in the report. */
@@ -96,7 +96,7 @@ public final class SoluteAnswersModel {
     }
 
     /** {@return what the budget says; empty where it is not known} */
-    public Optional<SoluteAnswer> answer() {
+    public Optional<Answer> answer() {
         return session.set()
                 .get()
                 .flatMap(set -> plumes.shown()
@@ -107,7 +107,7 @@ public final class SoluteAnswersModel {
                                 .map(water -> answer(set, shown, water))));
     }
 
-    private SoluteAnswer answer(OpenSet set, PlumeShown shown, BudgetShown water) {
+    private Answer answer(OpenSet set, PlumeShown shown, BudgetShown water) {
         MassUnits units = masses.inUse(set);
         PlumeResult result = PlumeResult.of(
                 set.aquifer(),
@@ -115,7 +115,7 @@ public final class SoluteAnswersModel {
                 reading.periods(set),
                 water.budget(),
                 look.choice(set).above());
-        return SoluteAnswer.of(
+        return Answer.of(
                 result,
                 units,
                 Wording.typeset(units.ofBudget(), session.numbers().get()::of));
@@ -123,8 +123,8 @@ public final class SoluteAnswersModel {
 
     /** {@return what the trend of mass and outflow is, in sentences; empty where it is not known} */
     public String trend() {
-        return answer().map(found ->
-                        String.join(" ", found.on(SoluteAnswer.Topic.TREND).toList()))
+        return answer().map(
+                        found -> String.join(" ", found.on(Answer.Topic.TREND).toList()))
                 .orElse("");
     }
 

@@ -7,7 +7,7 @@ import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.VBox;
 import org.seepledger.desktop.pane.StatePane;
 import org.seepledger.desktop.words.Words;
-import org.seepledger.report.SoluteAnswer;
+import org.seepledger.report.Answer;
 
 /** Questions and answers about a solute's budget, then what is doubtful, and the cautions in full. */
 public final class SoluteAnswersView extends BorderPane {
@@ -45,8 +45,8 @@ public final class SoluteAnswersView extends BorderPane {
         add(Words.of("caution.title"), model.cautions());
     }
 
-    private void fill(SoluteAnswer answer) {
-        for (SoluteAnswer.Topic topic : SoluteAnswer.Topic.values()) {
+    private void fill(Answer answer) {
+        for (Answer.Topic topic : Answer.Topic.values()) {
             add(topic.question(), answer.on(topic).toList());
         }
     }
