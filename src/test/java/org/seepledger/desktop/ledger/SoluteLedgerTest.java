@@ -84,7 +84,7 @@ class SoluteLedgerTest {
         assertThat(model.rows()).noneMatch(row -> row.kind() == Kind.HELD || !Double.isNaN(row.low()));
     }
 
-    /** While dragged, from the interval alone; at rest, from the record; for a month, which takes parts of two intervals. */
+    /** While dragged, from the interval alone; at rest, from the record; for a year, which takes many intervals. */
     @Test
     void isTheCommandsTableDigitForDigit() throws IOException {
         depot.look.dispersion().set(true);
@@ -95,8 +95,8 @@ class SoluteLedgerTest {
             depot.session.drawing().set(new Drawing(7, List.of(moved, depot.prisms.get(1)), settled));
             assertThat(copied()).containsExactlyInAnyOrderElementsOf(ofCommand("interval 5", Periods.Every.INTERVAL));
         }
-        depot.reading.every().set(Periods.Every.MONTH);
-        assertThat(copied()).containsExactlyInAnyOrderElementsOf(ofCommand("2021-10", Periods.Every.MONTH));
+        depot.reading.every().set(Periods.Every.YEAR);
+        assertThat(copied()).containsExactlyInAnyOrderElementsOf(ofCommand("2022", Periods.Every.YEAR));
     }
 
     private List<String> copied() {
