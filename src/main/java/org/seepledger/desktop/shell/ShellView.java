@@ -69,7 +69,7 @@ public final class ShellView extends StackPane {
     private final PreferencesPage preferencesPage;
     private final NoticePage noticePage;
     private final RunningList runningList;
-    private final CautionPage cautionPage = new CautionPage(this::lift);
+    private final CautionPage cautionPage;
 
     /**
      * Builds the frame.
@@ -91,6 +91,12 @@ public final class ShellView extends StackPane {
         this.model = model;
         this.slots = slots;
         this.actions = actions;
+        this.cautionPage = new CautionPage(
+                model.session()
+                        .set()
+                        .map(set ->
+                                set.filter(open -> !open.solutes().isEmpty()).isPresent()),
+                this::lift);
         this.actionsPage = new ActionsPage(actions, this::lift);
         work.setCenter(panes());
         this.preferencesPage = new PreferencesPage(preferences, this::lift);
