@@ -132,13 +132,13 @@ final class SetText {
     private List<Object> layers() {
         List<Optional<Bound>> tops = binder.perLayer(Role.TOP, Optional.empty());
         List<Optional<Bound>> bottoms = binder.perLayer(Role.BOTTOM, Optional.of(Topic.BOTTOM));
-        List<String> names = LayerWishes.names(plan);
         List<Boolean> waterTables = LayerWishes.waterTables(plan, binder.layers());
         List<Object> layers = new ArrayList<>();
         for (int layer = 0; layer < binder.layers(); layer++) {
             Map<String, Object> json = new LinkedHashMap<>();
-            if (layer < names.size() && !names.get(layer).isEmpty()) {
-                json.put("name", names.get(layer));
+            String name = LayerWishes.name(plan, layer + 1);
+            if (!name.isEmpty()) {
+                json.put("name", name);
             }
             Optional<Bound> top = tops.get(layer);
             if (layer == 0 && top.isEmpty()) {
@@ -222,6 +222,13 @@ final class SetText {
                     .forEach(use -> findings.accept(Finding.doubt(
                             item,
                             new Part(item, use).shown() + ": " + use.guess().reason())));
+            if (item instanceof Item.Table table && isUnseparated(table)) {
+                findings.accept(Finding.doubt(
+                        item,
+                        item.id() + " has a single column, \""
+                                + table.file().look().columns().get(0).heading()
+                                + "\". Separate columns by commas, semicolons or tabs."));
+            }
             if (item instanceof Item.Other other && other.file().kind() == LooseFile.Kind.BROKEN) {
                 findings.accept(Finding.doubt(item, other.file().words() + " Until then it is left out."));
             }
@@ -247,6 +254,11 @@ final class SetText {
             findings.accept(Finding.doubt(
                     Topic.RECHARGE, "There is no recharge, well or other source. Is nothing added and nothing taken?"));
         }
+    }
+
+    private static boolean isUnseparated(Item.Table table) {
+        return table.file().look().columns().size() == 1
+                && table.file().look().columns().get(0).heading().matches(".*[\\s|].*");
     }
 
     private void coefficients(Map<?, ?> storage) {

@@ -88,8 +88,7 @@ final class Reading {
     }
 
     private Optional<Submission> table(Sheet sheet, Catalogue catalogue, Numerals numerals) {
-        return MappingGuess.of(sheet, catalogue, numerals, waterYearStart)
-                .map(found -> corrections.map(found::under).orElse(found))
+        return MappingGuess.of(sheet, catalogue, numerals, waterYearStart, corrections)
                 .map(mapping -> Figures.of(sheet, mapping, catalogue, waterYearStart))
                 .map(table -> byValue(sheet, table, catalogue));
     }

@@ -2,14 +2,18 @@ package org.seepledger.job;
 
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
 import java.util.function.Function;
 import org.seepledger.aquifer.Aquifer;
+import org.seepledger.aquifer.CellGeometry;
+import org.seepledger.aquifer.Concentration;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.KnownCells;
+import org.seepledger.aquifer.Saturation;
 import org.seepledger.aquifer.Solute;
 import org.seepledger.aquifer.Window;
 import org.seepledger.balance.Span;
@@ -22,7 +26,10 @@ import org.seepledger.io.prisms.TransectsWriter;
 import org.seepledger.io.result.MassUnits;
 import org.seepledger.io.table.MeasuredPanels;
 import org.seepledger.ledger.Period;
+import org.seepledger.picture.Drape;
+import org.seepledger.picture.ThresholdOutline;
 import org.seepledger.plume.Crossing;
+import org.seepledger.plume.NonDetects;
 import org.seepledger.plume.Plume;
 import org.seepledger.plume.SoluteBalance;
 import org.seepledger.plume.TransectFlows;
@@ -207,6 +214,50 @@ public final class SoluteBench {
                 : Span.all(aquifer().times());
         Function<Window, KnownCells> known = interval.isPresent() ? kept : window -> aquifer();
         return gate.ask(progress, until -> TransectFlows.of(aquifer(), known, span, solutes, transects, until));
+    }
+
+    /**
+     * {@return the outline of the cells of a layer with more than a concentration at an interval's end, non-detects counted as
+     * half their limit: the cells that a budget counts in}
+     *
+     * @param solute the solute
+     * @param layer the layer, from 0
+     * @param interval the interval, from 0
+     * @param above the concentration, kg/length³
+     * @param progress told how far the work is
+     * @throws org.seepledger.fault.DataFault if the data are wrong
+     * @throws org.seepledger.progress.Cancelled if the work was stopped
+     */
+    public ThresholdOutline outline(Solute solute, int layer, int interval, double above, Progress progress) {
+        return gate.ask(progress, until -> {
+            until.begin("outlining a plume", 1);
+            Grid grid = aquifer().grid();
+            double[] values = wetConcentrations(solute, layer, interval);
+            until.step();
+            int columns = grid.columns();
+            Drape drape = Drape.of(
+                    grid,
+                    grid.window(),
+                    Math.max(grid.rows(), columns),
+                    row -> Arrays.copyOfRange(values, row * columns, (row + 1) * columns));
+            return ThresholdOutline.of(drape, above);
+        });
+    }
+
+    /** In kg/length³; none where a cell holds no water at the interval's end. */
+    private double[] wetConcentrations(Solute solute, int layer, int interval) {
+        Window all = aquifer().grid().window();
+        CellGeometry geometry = aquifer().geometry(all);
+        Saturation saturation = aquifer().saturation(interval, geometry);
+        Concentration.AtInstant found = solute.concentration().orElseThrow().at(interval + 1, layer, all);
+        double[] values = found.values();
+        for (int cell = 0; cell < values.length; cell++) {
+            boolean wet = saturation.thickness(layer * all.size() + cell) > 0;
+            double limit = found.limits()[cell];
+            double value = Double.isNaN(limit) ? values[cell] : NonDetects.HALF.of(limit);
+            values[cell] = wet ? value : Double.NaN;
+        }
+        return values;
     }
 
     /**

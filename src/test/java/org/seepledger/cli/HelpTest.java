@@ -76,7 +76,9 @@ class HelpTest {
             {"balance", "--help"},
             {"trace", "--help"},
             {"extract", "--help"},
-            {"plume", "--help"}
+            {"plume", "--help"},
+            {"review", "--help"},
+            {"compare", "--help"}
         }) {
             assertThat(Ran.of(command).out().lines()).allMatch(line -> line.length() <= 100);
         }

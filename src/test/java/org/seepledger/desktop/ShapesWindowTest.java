@@ -9,15 +9,9 @@ import java.nio.file.Path;
 import java.util.List;
 import javafx.geometry.Bounds;
 import javafx.geometry.Point2D;
-import javafx.geometry.Pos;
 import javafx.scene.Node;
 import javafx.scene.control.Label;
-import javafx.scene.input.ClipboardContent;
 import javafx.scene.input.KeyCode;
-import javafx.scene.input.TransferMode;
-import javafx.scene.layout.Pane;
-import javafx.scene.layout.StackPane;
-import javafx.scene.shape.Rectangle;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -156,21 +150,8 @@ class ShapesWindowTest {
                 window.assembly().session().set().get().orElseThrow().path().endsWith("terrace"));
     }
 
-    /** Drags a folder with the mouse from a mark that the test puts into the window's corner. */
-    private void drop(String pane, Path folder) {
-        Rectangle mark = new Rectangle(24, 24);
-        mark.setOnDragDetected(drag -> {
-            ClipboardContent content = new ClipboardContent();
-            content.putFiles(List.of(folder.toAbsolutePath().toFile()));
-            mark.startDragAndDrop(TransferMode.ANY).setContent(content);
-            drag.consume();
-        });
-        Pane root = (Pane) window.assembly().scene().getRoot();
-        window.robot.interact(() -> {
-            root.getChildren().add(mark);
-            StackPane.setAlignment(mark, Pos.BOTTOM_CENTER);
-        });
-        window.robot.drag(mark).dropTo(pane);
-        window.robot.interact(() -> root.getChildren().remove(mark));
+    private void drop(String pane, Path dropped) {
+        window.robot.interact(
+                () -> DraggedFolder.dropOn(window.robot.lookup(pane).query(), dropped));
     }
 }

@@ -4,6 +4,7 @@ import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.time.Duration;
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Optional;
@@ -52,6 +53,7 @@ public final class IntakeModel {
     private final Lane writing;
     private final Lane previewing;
     private final Set<Path> brought = new LinkedHashSet<>();
+    private final Set<Path> leftOut = new HashSet<>();
     private final BooleanProperty shown = new SimpleBooleanProperty();
     private final IntegerProperty chosen = new SimpleIntegerProperty(-1);
     private final StringProperty target = new SimpleStringProperty("");
@@ -146,6 +148,7 @@ public final class IntakeModel {
     /** Forgets all files. */
     void clear() {
         brought.clear();
+        leftOut.clear();
         looking.cancel();
         making.cancel();
         checking.cancel();
@@ -169,11 +172,13 @@ public final class IntakeModel {
         brought.addAll(
                 paths.stream().map(path -> path.toAbsolutePath().normalize()).toList());
         List<Path> all = new ArrayList<>(brought);
+        leftOut.removeAll(brought);
+        Set<Path> without = Set.copyOf(leftOut);
         state.set(PaneState.working(Words.of("intake.looking")));
         looking.run(
                 progress -> {
                     EntryGuard.enter();
-                    return Proposal.of(IntakeJob.look(all, progress));
+                    return Proposal.of(IntakeJob.look(all, progress).without(without));
                 },
                 this::found,
                 fault -> {
@@ -262,6 +267,19 @@ public final class IntakeModel {
             if (!changed.equals(item)) {
                 take(now.with(chosen.get(), changed));
             }
+        });
+    }
+
+    /**
+     * Leaves out one of several files of the item looked at.
+     *
+     * @param file which, from 0
+     */
+    void leaveOut(int file) {
+        change(item -> {
+            Item.Rasters rasters = (Item.Rasters) item;
+            leftOut.add(rasters.files().get(file).path());
+            return rasters.without(file);
         });
     }
 
@@ -369,6 +387,7 @@ public final class IntakeModel {
                 done -> {
                     written.set(PaneState.READY);
                     shown.set(false);
+                    clear();
                     open.accept(done);
                 },
                 fault -> written.set(isStopped(fault) ? PaneState.READY : PaneState.failed(FaultWords.of(fault))));

@@ -167,12 +167,13 @@ final class OutcomePane extends VBox {
                 "intake.size", made.copied().copies().size(), bytes(made.plan().bytes())));
         List<String> reasons = made.placed().obstacles();
         obstacles.setText(
-                reasons.isEmpty()
-                        ? ""
-                        : reasons.size() == 1
-                                ? Words.of("intake.obstacle", reasons.get(0))
-                                : Words.of("intake.obstacles", reasons.get(0), reasons.size() - 1));
-        obstacles.setManaged(!reasons.isEmpty());
+                reasons.isEmpty() ? Words.of("intake.place", made.plan().root()) : why(reasons));
+    }
+
+    private static String why(List<String> reasons) {
+        return reasons.size() == 1
+                ? Words.of("intake.obstacle", reasons.get(0))
+                : Words.of("intake.obstacles", reasons.get(0), reasons.size() - 1);
     }
 
     private static String bytes(long bytes) {

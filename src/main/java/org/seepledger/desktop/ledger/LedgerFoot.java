@@ -56,6 +56,10 @@ final class LedgerFoot extends GridPane {
         figure.setTooltip(new Tooltip(Words.of("ledger.origin")));
         figure.setOnAction(pressed -> model.askOrigin(row));
         figure.setMinWidth(USE_PREF_SIZE);
+        if (!Double.isNaN(row.low())) {
+            String bracket = Words.of("ledger.bracket", model.text(row, row.low()), model.text(row, row.high()));
+            figure.setTooltip(new Tooltip(bracket));
+        }
         add(name, place / HIGH * 2, place % HIGH);
         add(figure, place / HIGH * 2 + 1, place % HIGH);
     }

@@ -51,6 +51,7 @@ final class Lettering {
     static List<Mark> of(MapModel model) {
         Lettering lettering = new Lettering(model);
         Session session = model.session();
+        session.selectedPrism().ifPresent(lettering::keepVerticesFree);
         session.selectedPrism()
                 .ifPresent(prism -> lettering.flows(prism, session.faceFlows().get()));
         session.selectedPrism().ifPresent(prism -> lettering.name(prism, true));
@@ -59,7 +60,6 @@ final class Lettering {
                 lettering.name(prism, false);
             }
         }
-        session.selectedPrism().ifPresent(lettering::keepVerticesFree);
         if (model.overlays().wells().get()) {
             List<WellPlace> near = lettering.nearWells();
             near.forEach(lettering::keepFree);

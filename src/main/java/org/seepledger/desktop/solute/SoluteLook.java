@@ -5,13 +5,13 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
-import javafx.beans.Observable;
 import javafx.beans.property.BooleanProperty;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyLongProperty;
 import javafx.beans.property.ReadOnlyLongWrapper;
 import javafx.beans.property.SimpleBooleanProperty;
 import javafx.beans.property.SimpleObjectProperty;
+import javafx.beans.value.ObservableValue;
 import org.seepledger.aquifer.Solute;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
@@ -49,9 +49,8 @@ public final class SoluteLook {
      */
     public SoluteLook(Session session) {
         this.session = session;
-        session.set().addListener((set, before, after) -> threshold.set(Optional.empty()));
-        for (Observable cause : List.of(dispersion, threshold)) {
-            cause.addListener(changed -> changes.set(changes.get() + 1));
+        for (ObservableValue<?> cause : List.of(dispersion, threshold)) {
+            cause.addListener((value, before, after) -> changes.set(changes.get() + 1));
         }
     }
 

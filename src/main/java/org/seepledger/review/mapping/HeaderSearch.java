@@ -37,7 +37,7 @@ final class HeaderSearch {
     /** The header; empty where no line is like one. */
     Optional<Header> find() {
         int best = -1;
-        double most = 1.5;
+        double most = 0.4;
         int lookedAt = 0;
         for (int row = 0; row < sheet.rows().size() - 1 && lookedAt < LINES_LOOKED_AT; row++) {
             lookedAt += sheet.isBlank(row) ? 0 : 1;

@@ -1,5 +1,6 @@
 package org.seepledger.review.mapping;
 
+import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -49,15 +50,15 @@ public record Mapping(
                 given.header >= 0 ? given.header : header,
                 given.decimal.or(() -> decimal),
                 given.unit.isEmpty() ? unit : given.unit,
-                columns(given.columns),
+                corrected(columns, given.columns),
                 joinedTerms,
                 joinedAreas,
                 joinedPeriods);
     }
 
     /** The columns with those of the same heading in their place; the first takes the first, and so on. */
-    private List<Column> columns(List<Column> given) {
-        List<Column> left = new java.util.ArrayList<>(given);
+    static List<Column> corrected(List<Column> columns, List<Column> given) {
+        List<Column> left = new ArrayList<>(given);
         return columns.stream()
                 .map(column -> {
                     for (Column corrected : left) {

@@ -21,12 +21,15 @@ public final class MappingGuess {
     private static final double MOST = 0.6;
 
     private final Sheet sheet;
+    private final Optional<Mapping> corrections;
     private final Catalogue catalogue;
     private final Numerals numerals;
     private final PeriodWords periods;
     private final TermWords terms;
 
-    private MappingGuess(Sheet sheet, Catalogue catalogue, Numerals numerals, int waterYearStart) {
+    private MappingGuess(
+            Sheet sheet, Catalogue catalogue, Numerals numerals, int waterYearStart, Optional<Mapping> corrections) {
+        this.corrections = corrections;
         this.sheet = sheet;
         this.catalogue = catalogue;
         this.numerals = numerals;
@@ -41,9 +44,11 @@ public final class MappingGuess {
      * @param catalogue what there is to tie to
      * @param numerals reads its numbers
      * @param waterYearStart the month in which a water year begins, 1 to 12
+     * @param corrections what a person said of it, which holds
      */
-    public static Optional<Mapping> of(Sheet sheet, Catalogue catalogue, Numerals numerals, int waterYearStart) {
-        MappingGuess guess = new MappingGuess(sheet, catalogue, numerals, waterYearStart);
+    public static Optional<Mapping> of(
+            Sheet sheet, Catalogue catalogue, Numerals numerals, int waterYearStart, Optional<Mapping> corrections) {
+        MappingGuess guess = new MappingGuess(sheet, catalogue, numerals, waterYearStart, corrections);
         return new HeaderSearch(sheet, numerals, guess.terms, guess.periods, catalogue)
                 .find()
                 .map(guess::mapping);
@@ -55,6 +60,9 @@ public final class MappingGuess {
             columns.add(column(header, column));
         }
         settleLabels(columns, header.row());
+        if (corrections.isPresent()) {
+            columns = Mapping.corrected(columns, corrections.get().columns());
+        }
         Mapping read = new Mapping(
                 header.row(),
                 Optional.of(numerals.decimal()),
@@ -63,8 +71,9 @@ public final class MappingGuess {
                 Map.of(),
                 areas(columns, header.row()),
                 Map.of());
-        return new Mapping(
+        Mapping guessed = new Mapping(
                 read.header(), read.decimal(), read.unit(), columns, ties(read), read.areas(), read.periods());
+        return corrections.map(guessed::under).orElse(guessed);
     }
 
     private Column column(HeaderSearch.Header header, int index) {

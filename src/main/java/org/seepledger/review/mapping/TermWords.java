@@ -124,8 +124,9 @@ final class TermWords {
                         ours.get().items().get(0).replaceFirst("^[a-z]+/", "").toLowerCase(Locale.ROOT))) {
             return ours.get();
         }
+        boolean percent = UnitWords.in(label).filter("%"::equals).isPresent();
         for (Total known : TOTALS) {
-            if (known.words().matcher(words).find()) {
+            if (known.words().matcher(percent ? words + " %" : words).find()) {
                 return new Tie(known.kind(), List.of(), Optional.empty());
             }
         }

@@ -176,4 +176,18 @@ class IntakeModelTest {
         model.bring(List.of(folder.resolve("gone")));
         assertThat(model.state().get().phase()).isEqualTo(PaneState.Phase.FAILED);
     }
+
+    @Test
+    void oneOfSeveralFilesIsLeftOutForGood() {
+        files.raster("run1/recharge_2021-10.tif", 200).raster("run2/recharge_2021-10.tif", 300);
+        IntakeModel model = model(new DirectTasks());
+        model.bring(List.of(loose));
+        choose(model, "recharge");
+        model.leaveOut(1);
+        assertThat(model.item().orElseThrow().files()).hasSize(1);
+        files.raster("porosity.tif", 0.2);
+        model.bring(List.of(loose));
+        choose(model, "recharge");
+        assertThat(model.item().orElseThrow().files()).hasSize(1);
+    }
 }
