@@ -50,6 +50,7 @@ import org.seepledger.desktop.shell.ShellModel;
 import org.seepledger.desktop.shell.ShellView;
 import org.seepledger.desktop.shell.Slots;
 import org.seepledger.desktop.size.Magnifier;
+import org.seepledger.desktop.solute.KeptLook;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.theme.Dress;
 import org.seepledger.desktop.welcome.FolderDrop;
@@ -113,6 +114,9 @@ final class Assembly {
         tray.whenLeft(mapView::focus);
         this.running = new RunningModel(outside.tasks()::running);
         this.folio = new Folio(session, outside.tasks(), outside.dialogs(), outside.copies(), shell.theme());
+        KeptLook.of(folio.look(), outside.settings());
+        mapView.lay(folio.plumeMap()::marks);
+        folio.plumeMap().changes().addListener((changes, before, after) -> mapView.repaint());
         this.section = new SectionModel(session, outside.tasks(), draft);
         SectionView sectionView = new SectionView(section, shell.theme());
         this.shelf =

@@ -196,7 +196,7 @@ public final class PlumeJob {
         options.put("volume-unit", units.volume().toString());
         options.put("wells", request.wells().name().toLowerCase(Locale.ROOT));
         options.put("dispersion", String.valueOf(request.dispersion()));
-        request.above().ifPresent(threshold -> options.put("above", threshold.value() + " " + threshold.unit()));
+        request.above().ifPresent(threshold -> options.put("above", threshold.toString()));
         request.transects().ifPresent(file -> options.put("transects", file.toString()));
         request.panels().ifPresent(file -> options.put("panels", file.toString()));
         options.put("clip", String.valueOf(request.clip()));

@@ -12,6 +12,7 @@ import javafx.scene.image.PixelFormat;
 import javafx.scene.input.KeyCode;
 import org.seepledger.desktop.theme.Theme;
 import org.seepledger.intake.LooseValley;
+import org.seepledger.job.MapQuantity;
 import org.seepledger.picture.SectionLine;
 import org.seepledger.sketch.Place;
 
@@ -76,9 +77,34 @@ public final class Screenshots {
                 both(window, folder, "preferences", suffix);
                 window.robot.interact(window.assembly().view()::showNotices);
                 both(window, folder, "messages", suffix);
+                press(window, javafx.scene.input.KeyCode.ESCAPE);
+                solutes(window, folder, suffix);
             }
         }
         System.exit(0);
+    }
+
+    private static void solutes(OpenWindow window, Path folder, String suffix) throws IOException {
+        window.openSet(Path.of("sample-aquifers/depot"));
+        window.settle();
+        window.robot.interact(() -> {
+            window.assembly().session().solute().set("solvent");
+            window.assembly().session().interval().set(5);
+            window.assembly()
+                    .map()
+                    .values()
+                    .quantity()
+                    .set(window.assembly().map().values().quantities().stream()
+                            .filter(each -> each.kind() == MapQuantity.Kind.CONCENTRATION)
+                            .findFirst());
+        });
+        window.settle();
+        window.robot.clickOn("#solute-threshold").write("0.1 mg/L").type(javafx.scene.input.KeyCode.ENTER);
+        for (String page : new String[] {"ledger", "answers", "transects"}) {
+            window.robot.clickOn("#folio-" + page);
+            window.settle();
+            both(window, folder, "solute-" + page, suffix);
+        }
     }
 
     private static void section(OpenWindow window, Path folder, String suffix) throws IOException {

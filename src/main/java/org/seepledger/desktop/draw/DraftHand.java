@@ -23,6 +23,7 @@ public final class DraftHand implements Hand {
     private final SelectHand select;
     private final StrokeHand stroke;
     private final SpanHand span;
+    private final LineHand line;
     private Optional<Touch> last = Optional.empty();
 
     /**
@@ -35,6 +36,7 @@ public final class DraftHand implements Hand {
         this.select = new SelectHand(model, pick, snapper);
         this.stroke = new StrokeHand(model, snapper);
         this.span = new SpanHand(model, snapper);
+        this.line = new LineHand(model, snapper);
         model.tool().addListener((tool, before, after) -> {
             stroke.cancel();
             span.cancel();
@@ -51,14 +53,19 @@ public final class DraftHand implements Hand {
     }
 
     private boolean isStroke() {
-        return tool() == Tool.POLYGON || tool() == Tool.ISLAND || tool() == Tool.SPLIT || tool() == Tool.SECTION;
+        return tool() == Tool.POLYGON
+                || tool() == Tool.ISLAND
+                || tool() == Tool.SPLIT
+                || tool() == Tool.SECTION
+                || tool() == Tool.TRANSECT;
     }
 
     @Override
     public boolean press(Touch touch) {
         begin(touch);
         if (tool() == Tool.SELECT) {
-            return select.press(touch);
+            line.letGo();
+            return !select.isOnVertex(touch) && line.press(touch) || select.press(touch);
         }
         if (tool() == Tool.MERGE) {
             merge(touch);
@@ -92,7 +99,9 @@ public final class DraftHand implements Hand {
     @Override
     public void drag(Touch touch) {
         last = Optional.of(touch);
-        if (tool() == Tool.SELECT) {
+        if (line.isHeld()) {
+            line.drag(touch);
+        } else if (tool() == Tool.SELECT) {
             select.drag(touch);
         } else if (isSpan()) {
             span.drag(touch);
@@ -103,7 +112,9 @@ public final class DraftHand implements Hand {
 
     @Override
     public void release(Touch touch) {
-        if (tool() == Tool.SELECT) {
+        if (line.isHeld()) {
+            line.release();
+        } else if (tool() == Tool.SELECT) {
             select.release();
         } else if (isSpan()) {
             span.release(touch);
@@ -114,6 +125,7 @@ public final class DraftHand implements Hand {
     public void hover(Touch touch) {
         if (tool() == Tool.SELECT) {
             select.hover(touch);
+            line.hover(touch);
         } else if (isSpan()) {
             span.hover(touch);
         } else if (isStroke()) {
@@ -134,7 +146,7 @@ public final class DraftHand implements Hand {
     @Override
     public Aim aim() {
         return switch (tool()) {
-            case SELECT -> select.aim();
+            case SELECT -> line.isOver() ? Aim.MOVE : select.aim();
             case MERGE -> Aim.CHOOSE;
             default -> Aim.DRAW;
         };
@@ -143,6 +155,7 @@ public final class DraftHand implements Hand {
     @Override
     public List<Mark> marks(Camera camera) {
         DraftMarks marks = new DraftMarks(camera);
+        marks.lines(model.drawing().lines(), model.session().transect().get(), line.vertex());
         model.selected().ifPresent(shape -> marks.shape(shape, pick));
         boolean closes = tool() == Tool.POLYGON || tool() == Tool.ISLAND;
         if (isStroke()) {
@@ -167,7 +180,7 @@ public final class DraftHand implements Hand {
     public void delete() {
         if (isStroke()) {
             stroke.back();
-        } else if (tool() == Tool.SELECT) {
+        } else if (tool() == Tool.SELECT && !line.delete()) {
             select.delete();
         }
     }
@@ -175,6 +188,7 @@ public final class DraftHand implements Hand {
     /** Gives up what is going on: everything is again as it was, to the last bit. */
     public void cancel() {
         if (tool() == Tool.SELECT) {
+            line.cancel();
             select.cancel();
         } else {
             model.choose(Tool.SELECT);
@@ -198,7 +212,7 @@ public final class DraftHand implements Hand {
      * @return false if none is chosen
      */
     public boolean nudge(double dx, double dy) {
-        return tool() == Tool.SELECT && select.nudge(dx, dy);
+        return tool() == Tool.SELECT && (line.nudge(dx, dy) || select.nudge(dx, dy));
     }
 
     /**
@@ -231,8 +245,15 @@ public final class DraftHand implements Hand {
     }
 
     private boolean place(Place place) {
+        boolean ofTransect = tool() == Tool.TRANSECT || line.vertex().isPresent();
+        if (ofTransect && !model.onGrid(place).equals(place)) {
+            throw new Refusal(Words.of("transect.off"));
+        }
         if (isStroke()) {
             stroke.add(place);
+            return true;
+        }
+        if (line.put(place)) {
             return true;
         }
         Place from = select.vertexPlace().orElseThrow(() -> new Refusal(Words.of("type.vertex")));

@@ -17,10 +17,13 @@ import org.seepledger.aquifer.Layer;
 import org.seepledger.desktop.session.Drafting;
 import org.seepledger.desktop.session.DrawnShapes;
 import org.seepledger.desktop.session.Session;
+import org.seepledger.desktop.session.Transects;
 import org.seepledger.desktop.words.Words;
+import org.seepledger.sketch.ControlLine;
 import org.seepledger.sketch.Drawing;
 import org.seepledger.sketch.History;
 import org.seepledger.sketch.Limit;
+import org.seepledger.sketch.Place;
 import org.seepledger.sketch.Refusal;
 import org.seepledger.sketch.Shape;
 
@@ -42,10 +45,14 @@ public final class DraftModel implements Drafting {
      */
     public DraftModel(Session session) {
         this.session = session;
+        session.transectName().addListener((name, before, after) -> after.ifPresent(this::rename));
         session.demand().addListener((demand, before, after) -> {
             if (after == Session.Demand.DRAW_PRISM || after == Session.Demand.DRAW_SECTION) {
                 session.demand().set(Session.Demand.NONE);
                 choose(after == Session.Demand.DRAW_PRISM ? Tool.POLYGON : Tool.SECTION);
+            } else if (after == Session.Demand.DRAW_TRANSECT) {
+                session.demand().set(Session.Demand.NONE);
+                choose(Tool.TRANSECT);
             }
         });
     }
@@ -93,11 +100,37 @@ public final class DraftModel implements Drafting {
                                         Math.max(1, layers.size()), (limit, lid) -> surface(layers, limit, lid)))
                                 .toList(),
                         settled));
+        publishLines(settled);
         tellShapes();
         if (history.current().find(session.selected().get()).isEmpty()) {
             session.selected().set("");
         }
         version.set(version.get() + 1);
+    }
+
+    private void publishLines(boolean settled) {
+        session.transects().set(new Transects(drawing().lines(), settled));
+        if (selectedLine().isEmpty()) {
+            session.transect()
+                    .set(drawing().lines().stream()
+                            .map(ControlLine::name)
+                            .findFirst()
+                            .orElse(""));
+        }
+    }
+
+    private void rename(String name) {
+        session.transectName().set(Optional.empty());
+        selectedLine().filter(line -> !line.name().equals(name)).ifPresent(line -> {
+            if (step("step.transect.name", drawing -> drawing.editLine(line.name(), given -> given.named(name)))) {
+                session.transect().set(name);
+            }
+        });
+    }
+
+    /** {@return the transect that is chosen, if there is one} */
+    Optional<ControlLine> selectedLine() {
+        return drawing().line(session.transect().get());
     }
 
     private GriddedValues surface(List<Layer> layers, Limit limit, String lid) {
@@ -236,6 +269,9 @@ public final class DraftModel implements Drafting {
      * @param chosen the tool
      */
     public void choose(Tool chosen) {
+        if (chosen == Tool.TRANSECT && !hasSolutes()) {
+            return;
+        }
         if (chosen.needsPrism() && selected().isEmpty()) {
             refuse(Words.of("tool.needs"));
             return;
@@ -278,6 +314,16 @@ public final class DraftModel implements Drafting {
 
     Optional<Grid> grid() {
         return session.set().get().map(set -> set.aquifer().grid());
+    }
+
+    /** {@return whether the open set has solutes, so that transects mean something} */
+    boolean hasSolutes() {
+        return session.set().get().filter(set -> !set.solutes().isEmpty()).isPresent();
+    }
+
+    /** The nearest place that a transect can have. */
+    Place onGrid(Place place) {
+        return grid().map(grid -> ControlLine.within(grid, place)).orElse(place);
     }
 
     /** How near two places count as one when prisms are cut or joined: far below what can be seen. */

@@ -105,6 +105,10 @@ public final class Tray extends HBox {
         });
         model.tool().addListener((chosen, before, after) -> button.setSelected(after == tool));
         button.setSelected(model.tool().get() == tool);
+        if (tool == Tool.TRANSECT) {
+            button.visibleProperty().bind(model.session().set().map(set -> model.hasSolutes()));
+            button.managedProperty().bind(button.visibleProperty());
+        }
         return button;
     }
 
