@@ -23,8 +23,8 @@ public final class DraftHand implements Hand {
     private final SelectHand select;
     private final StrokeHand stroke;
     private final SpanHand span;
-    private Optional<Touch> last = Optional.empty();
     private final LineHand line;
+    private Optional<Touch> last = Optional.empty();
 
     /**
      * Makes the hand.

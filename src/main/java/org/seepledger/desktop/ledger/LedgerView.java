@@ -23,9 +23,9 @@ public final class LedgerView extends BorderPane {
 
     private static final KeyCombination COPY = new KeyCodeCombination(KeyCode.C, KeyCombination.SHORTCUT_DOWN);
     private static final PseudoClass HEADING = PseudoClass.getPseudoClass("heading");
-    private static final double NUMBER = 92;
+    private static final double NUMBER = 86;
     private static final double LONG_NUMBER = 100;
-    private static final double NAME = 136;
+    private static final double NAME = 150;
     private static final double SHORT_NAME = 122;
     private static final PseudoClass TOTAL = PseudoClass.getPseudoClass("total");
 

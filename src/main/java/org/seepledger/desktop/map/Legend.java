@@ -125,7 +125,7 @@ final class Legend extends VBox {
             return;
         }
         if (!model.range(number(from.getText()), number(to.getText()))) {
-            fault.say(Words.of("map.range.refused"));
+            fault.say(Words.of(model.isLogarithmic() ? "map.range.log" : "map.range.refused"));
         }
     }
 

@@ -103,7 +103,7 @@ public final class SoluteLook {
      * Takes a concentration that was typed: a number in the solute's own unit, or with a unit after it; nothing for none.
      *
      * @param text what was typed
-     * @return whether it was taken: else the status line says what is wanted
+     * @return whether it was taken
      */
     public boolean type(String text) {
         if (text.isBlank()) {
@@ -114,9 +114,13 @@ public final class SoluteLook {
             threshold.set(Optional.of(typed(text)));
             return true;
         } catch (IllegalArgumentException e) {
-            session.status().set(Words.of("solute.threshold.refused", unit()));
             return false;
         }
+    }
+
+    /** {@return what can be typed, in a sentence} */
+    public String wanted() {
+        return Words.of("solute.threshold.refused", unit());
     }
 
     private Threshold typed(String text) {

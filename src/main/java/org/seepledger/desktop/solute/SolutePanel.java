@@ -16,6 +16,7 @@ import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.VBox;
 import javafx.util.StringConverter;
+import org.seepledger.desktop.pane.FieldFault;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.job.PlumeRequest.Threshold;
 
@@ -26,6 +27,7 @@ public final class SolutePanel extends VBox {
 
     private final SoluteLook look;
     private final TextField threshold = new TextField();
+    private final FieldFault fault = new FieldFault("solute-threshold-fault");
 
     /**
      * Builds the panel.
@@ -50,7 +52,8 @@ public final class SolutePanel extends VBox {
         FlowPane choices = new FlowPane(12, 6, subject, threshold(), track(), dispersion(), doubts);
         choices.getChildren().stream().skip(1).forEach(node -> onlyOfSolutes(node, model));
         choices.setRowValignment(VPos.CENTER);
-        getChildren().addAll(choices, line("solute-above", model.above()));
+        fault.setMaxWidth(Double.MAX_VALUE);
+        getChildren().addAll(choices, fault, line("solute-above", model.above()));
     }
 
     private static void onlyOfSolutes(Node node, SolutePanelModel model) {
@@ -89,15 +92,16 @@ public final class SolutePanel extends VBox {
         return row(label, threshold);
     }
 
-    /** What cannot be taken is put back as it was. */
+    /** What cannot be taken stays as it was typed, with the reason below. */
     private void take() {
-        if (!threshold.getText().equals(text(look.threshold().get())) && !look.type(threshold.getText())) {
-            show(look.threshold().get());
-        }
+        String typed = threshold.getText();
+        boolean taken = typed.equals(text(look.threshold().get())) || look.type(typed);
+        fault.say(taken ? "" : look.wanted());
     }
 
     private void show(Optional<Threshold> typed) {
         threshold.setText(text(typed));
+        fault.say("");
     }
 
     private static String text(Optional<Threshold> typed) {

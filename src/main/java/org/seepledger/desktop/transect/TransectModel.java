@@ -3,7 +3,6 @@ package org.seepledger.desktop.transect;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.OptionalInt;
 import javafx.beans.property.BooleanProperty;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyObjectProperty;
@@ -14,17 +13,14 @@ import javafx.beans.value.ObservableValue;
 import javafx.collections.FXCollections;
 import javafx.collections.ObservableList;
 import org.seepledger.aquifer.Solute;
-import org.seepledger.balance.Periods;
 import org.seepledger.desktop.budget.PeriodWords;
 import org.seepledger.desktop.budget.Reading;
 import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
-import org.seepledger.desktop.session.Transects;
 import org.seepledger.desktop.solute.MassReading;
 import org.seepledger.desktop.task.EntryGuard;
-import org.seepledger.desktop.task.Inquiry;
 import org.seepledger.desktop.task.Lane;
 import org.seepledger.desktop.task.PaneState;
 import org.seepledger.desktop.task.Tasks;
@@ -33,7 +29,6 @@ import org.seepledger.desktop.words.Words;
 import org.seepledger.io.table.MeasuredPanels;
 import org.seepledger.ledger.Period;
 import org.seepledger.plume.Crossing;
-import org.seepledger.sketch.ControlLine;
 
 /** What crosses the transect that is chosen, of the solute looked at. */
 public final class TransectModel {
@@ -46,8 +41,7 @@ public final class TransectModel {
     private final CopyBoard copies;
     private final FileDialogs dialogs;
     private final Lane files;
-    private final Inquiry<Question, List<Crossing>> now;
-    private final Inquiry<Question, List<Crossing>> whole;
+    private final LiveCrossings crossings;
     private final BooleanProperty open = new SimpleBooleanProperty();
     private final ObservableList<Choice> choices = FXCollections.observableArrayList();
     private final ObjectProperty<Optional<Choice>> chosen = new SimpleObjectProperty<>(Optional.empty());
@@ -63,9 +57,6 @@ public final class TransectModel {
      * @param measured which of the measured ones, from 0; -1 for a drawn one
      */
     public record Choice(String name, int measured) {}
-
-    /** What crosses lines, in one interval or in all. */
-    private record Question(OpenSet set, List<ControlLine> lines, OptionalInt interval) {}
 
     /**
      * Makes the model.
@@ -85,34 +76,17 @@ public final class TransectModel {
         this.copies = copies;
         this.dialogs = dialogs;
         this.files = tasks.latest("task.panels");
-        this.now = inquiry(tasks.latest("task.transects.interval"));
-        this.whole = inquiry(tasks.latest("task.transects.record"));
+        this.crossings = new LiveCrossings(session, tasks, reading);
         session.set().addListener((set, before, after) -> begin());
         session.transects().addListener((transects, before, after) -> fill());
-        session.transect().addListener((name, before, after) -> fill());
+        session.transect().addListener((name, before, after) -> touch());
         chosen.addListener((choice, before, after) -> choose(after));
         for (ObservableValue<?> cause :
-                List.of(open, session.interval(), session.solute(), reading.changes(), masses.changes(), now.state())) {
+                List.of(open, session.interval(), session.solute(), reading.changes(), masses.changes())) {
             cause.addListener((value, before, after) -> show());
         }
-        for (ObservableValue<?> cause : List.of(now.last(), whole.last(), whole.state())) {
-            cause.addListener((value, before, after) -> show());
-        }
+        crossings.causes().forEach(cause -> cause.addListener((value, before, after) -> show()));
         fill();
-    }
-
-    private static Inquiry<Question, List<Crossing>> inquiry(Lane lane) {
-        return new Inquiry<>(
-                lane,
-                (question, progress) -> question.set
-                        .workbench()
-                        .solutes()
-                        .crossings(
-                                question.lines.stream()
-                                        .map(ControlLine::transect)
-                                        .toList(),
-                                question.interval,
-                                progress));
     }
 
     private static PaneState nothing() {
@@ -121,8 +95,7 @@ public final class TransectModel {
 
     private void begin() {
         measured.clear();
-        now.forget(nothing());
-        whole.forget(nothing());
+        crossings.forget(nothing());
         fill();
     }
 
@@ -171,8 +144,7 @@ public final class TransectModel {
 
     /** Works out again what was stopped or failed. */
     public void again() {
-        now.again();
-        whole.again();
+        crossings.again();
     }
 
     /**
@@ -205,6 +177,14 @@ public final class TransectModel {
         show();
     }
 
+    /** A transect that the map was touched at takes the place of a measured one. */
+    private void touch() {
+        filling = true;
+        chosen.set(Optional.empty());
+        filling = false;
+        fill();
+    }
+
     private void choose(Optional<Choice> choice) {
         if (!filling) {
             choice.filter(drawn -> drawn.measured < 0)
@@ -213,7 +193,6 @@ public final class TransectModel {
         }
     }
 
-    /** A transect that the map was touched at takes the place of a measured one. */
     private Optional<MeasuredPanels> measuredPanels() {
         return chosen.get().filter(choice -> choice.measured >= 0).map(choice -> measured.get(choice.measured));
     }
@@ -221,8 +200,7 @@ public final class TransectModel {
     private void show() {
         Optional<OpenSet> set = session.set().get();
         if (!open.get() || set.isEmpty() || chosen.get().isEmpty()) {
-            now.rest(nothing());
-            whole.rest(nothing());
+            crossings.rest(nothing());
             table.set(Optional.empty());
             state.set(nothing());
             return;
@@ -232,9 +210,9 @@ public final class TransectModel {
             state.set(PaneState.READY);
             return;
         }
-        ask(set.get());
+        crossings.ask(set.get());
         Period period = reading.period(set.get(), session.interval().get());
-        Optional<Crossing> crossing = crossing();
+        Optional<Crossing> crossing = solute().flatMap(crossings::of);
         table.set(crossing.map(found -> TransectTable.of(
                 set.get(),
                 masses.inUse(set.get()),
@@ -242,43 +220,7 @@ public final class TransectModel {
                 period,
                 PeriodWords.of(
                         period, set.get().aquifer().times(), session.numbers().get()))));
-        state.set(inUse().state().get());
-    }
-
-    private boolean quick() {
-        return reading.every().get() == Periods.Every.INTERVAL;
-    }
-
-    private Inquiry<Question, List<Crossing>> inUse() {
-        return quick() ? now : whole;
-    }
-
-    private void ask(OpenSet set) {
-        Transects drawn = session.transects().get();
-        if (quick()) {
-            drawn.line(session.transect().get())
-                    .ifPresent(line -> now.want(new Question(
-                            set,
-                            List.of(line),
-                            OptionalInt.of(session.interval().get()))));
-        } else if (drawn.settled()) {
-            whole.wantAtRest(new Question(set, drawn.lines(), OptionalInt.empty()));
-        }
-    }
-
-    /** What was last worked out, if it is of the transect and the time looked at. */
-    private Optional<Crossing> crossing() {
-        String line = session.transect().get();
-        return solute().flatMap(solute -> inUse().last()
-                .get()
-                .filter(reply -> !quick()
-                        || reply.question()
-                                .interval
-                                .equals(OptionalInt.of(session.interval().get())))
-                .flatMap(reply -> reply.answer().stream()
-                        .filter(crossing -> crossing.transect().name().equals(line))
-                        .filter(crossing -> crossing.solute().name().equals(solute))
-                        .findFirst()));
+        state.set(crossings.state());
     }
 
     /** The solute looked at; the first where that is the water. */

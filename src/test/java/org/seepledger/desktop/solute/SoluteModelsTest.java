@@ -58,8 +58,8 @@ class SoluteModelsTest {
         assertThat(depot.look.choice(depot.set).above().orElseThrow()).isCloseTo(inMilligrams, within(1e-18));
         for (String text : new String[] {"0.1 m", "much", "-1", "1 2 mg/L", "NaN"}) {
             assertThat(depot.look.type(text)).as(text).isFalse();
-            assertThat(depot.session.status().get()).contains("mg/L");
         }
+        assertThat(depot.look.wanted()).contains("mg/L");
         assertThat(depot.look.threshold().get()).isPresent();
         assertThat(depot.look.type("")).isTrue();
         assertThat(depot.look.choice(depot.set).above()).isEmpty();
