@@ -44,6 +44,9 @@ public final class OriginModel {
     /** More values than these are not kept: nobody reads them, and the sum of the others is told. */
     private static final int MOST = 5000;
 
+    /** A difference that shows in the digits that a person reads. */
+    private static final double SEEN = 1e-5;
+
     private static final FileDialogs.Kind CSV = new FileDialogs.Kind("CSV", "*.csv");
 
     private final Session session;
@@ -185,10 +188,17 @@ public final class OriginModel {
         answer = Optional.of(number);
         String unit = Wording.raised(number.units().rate());
         sum.set(Words.of("origin.sum", shown(number.net()), unit, number.count(), exact(number.sum()))
+                + rounding(number)
                 + amount(number));
         fill();
         showRemark();
         state.set(PaneState.READY);
+    }
+
+    /** Where much cancels, a sum in another order ends in other digits; that it is no more than that has been checked. */
+    private static String rounding(TracedNumber number) {
+        boolean differs = Math.abs(number.sum() - number.net()) > SEEN * Math.abs(number.net());
+        return differs ? " " + Words.of("origin.rounding") : "";
     }
 
     /** All digits, with a true minus. */
