@@ -1,6 +1,7 @@
 package org.seepledger.aquifer;
 
 import java.util.Optional;
+import java.util.function.Function;
 import org.seepledger.unit.Measure;
 
 /**
@@ -31,10 +32,29 @@ public record Concentration(
      * @param block the cells
      */
     public AtInstant at(int instant, Block block) {
-        double[] found = at(instant, values, block);
-        double[] limits = at(instant, marks, block);
+        return at(given -> block.read(given, step(given, instant)));
+    }
+
+    /**
+     * Reads one layer of a window at an instant.
+     *
+     * @param instant the instant, from 0
+     * @param layer the layer, from 0
+     * @param window the cells
+     */
+    public AtInstant at(int instant, int layer, Window window) {
+        return at(given -> {
+            double[] target = new double[window.size()];
+            given.read(layer, step(given, instant), window, target, 0);
+            return target;
+        });
+    }
+
+    private AtInstant at(Function<GriddedValues, double[]> read) {
+        double[] found = read.apply(values);
+        double[] limits = read.apply(marks);
         limit.ifPresent(given -> {
-            double[] least = at(instant, given, block);
+            double[] least = read.apply(given);
             for (int cell = 0; cell < found.length; cell++) {
                 boolean below = Double.isNaN(limits[cell]) && found[cell] < least[cell];
                 limits[cell] = below ? least[cell] : limits[cell];
@@ -43,7 +63,7 @@ public record Concentration(
         return new AtInstant(found, limits);
     }
 
-    private static double[] at(int instant, GriddedValues given, Block block) {
-        return block.read(given, given.changes() ? instant : 0);
+    private static int step(GriddedValues given, int instant) {
+        return given.changes() ? instant : 0;
     }
 }

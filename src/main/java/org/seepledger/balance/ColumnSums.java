@@ -6,41 +6,38 @@ import org.seepledger.aquifer.Window;
 final class ColumnSums implements Bookings {
 
     private final Slopes slopes;
-    private final Window window;
-    private final double[] sums;
-    private int column;
+    private final SumsByColumn sums;
     private int booking;
 
     ColumnSums(Slopes slopes, Window window) {
         this.slopes = slopes;
-        this.window = window;
-        this.sums = new double[window.size()];
+        this.sums = new SumsByColumn(window);
     }
 
     /** The sum of a column of cells. */
     double get(int cellRow, int cellColumn) {
-        return sums[window.index(cellRow, cellColumn)];
+        return sums.get(cellRow, cellColumn);
     }
 
     @Override
     public void at(int cellRow, int cellColumn) {
-        column = window.index(cellRow, cellColumn);
+        sums.at(cellRow, cellColumn);
     }
 
     @Override
     public void throughPiece(int account, double start, double end) {
-        sums[column] += slopes.get(booking++) * start;
-        sums[column] += slopes.get(booking++) * end;
+        sums.add(slopes.get(booking++) * start);
+        sums.add(slopes.get(booking++) * end);
     }
 
     @Override
     public void throughFace(int account, double out) {
-        sums[column] += slopes.get(booking++) * out;
+        sums.add(slopes.get(booking++) * out);
     }
 
     @Override
     public void added(int account, double rate) {
-        sums[column] += slopes.get(booking++) * rate;
+        sums.add(slopes.get(booking++) * rate);
     }
 
     @Override

@@ -60,9 +60,7 @@ final class BalanceCommand implements Callable<Integer> {
         limit.check();
         Choices.measure("--mass-unit", massUnit, "kg");
         BalanceOutcome outcome = BalanceJob.run(request(), terminal.progress(options.progress()));
-        terminal.out().print(outcome.summary());
-        terminal.out().println();
-        terminal.out().println("Written to " + result.out() + ": " + String.join(", ", outcome.files()));
+        result.tell(terminal.out(), outcome.summary(), outcome.files());
         return limit.status(outcome.worstClosureError(), terminal.out());
     }
 

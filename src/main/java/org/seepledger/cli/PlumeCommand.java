@@ -81,9 +81,7 @@ final class PlumeCommand implements Callable<Integer> {
     public Integer call() {
         limit.check();
         PlumeOutcome outcome = PlumeJob.run(request(), terminal.progress(options.progress()));
-        terminal.out().print(outcome.summary());
-        terminal.out().println();
-        terminal.out().println("Written to " + result.out() + ": " + String.join(", ", outcome.files()));
+        result.tell(terminal.out(), outcome.summary(), outcome.files());
         return limit.status(outcome.worstClosureError(), terminal.out());
     }
 

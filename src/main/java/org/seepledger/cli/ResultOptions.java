@@ -1,6 +1,8 @@
 package org.seepledger.cli;
 
+import java.io.PrintStream;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Optional;
 import org.seepledger.unit.Measure;
 import picocli.CommandLine.Option;
@@ -53,5 +55,12 @@ final class ResultOptions {
 
     Optional<Measure> volumeUnit() {
         return Choices.measure("--volume-unit", volumeUnit, "m3");
+    }
+
+    /** Prints what a run came to, and which files it wrote. */
+    void tell(PrintStream to, String summary, List<String> files) {
+        to.print(summary);
+        to.println();
+        to.println("Written to " + out + ": " + String.join(", ", files));
     }
 }

@@ -22,6 +22,7 @@ import org.seepledger.desktop.folio.Folio;
 import org.seepledger.desktop.folio.Shelf;
 import org.seepledger.desktop.handover.HandoverModel;
 import org.seepledger.desktop.handover.HandoverPage;
+import org.seepledger.desktop.intake.IntakeActions;
 import org.seepledger.desktop.intake.IntakeModel;
 import org.seepledger.desktop.intake.IntakeView;
 import org.seepledger.desktop.intake.MendModel;
@@ -49,6 +50,7 @@ import org.seepledger.desktop.shell.ShellModel;
 import org.seepledger.desktop.shell.ShellView;
 import org.seepledger.desktop.shell.Slots;
 import org.seepledger.desktop.size.Magnifier;
+import org.seepledger.desktop.solute.KeptLook;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.theme.Dress;
 import org.seepledger.desktop.welcome.FolderDrop;
@@ -109,8 +111,12 @@ final class Assembly {
         this.mapView = new MapView(map, ground, outside.tasks(), shell.theme(), hand, tray);
         draft.version().addListener((version, before, after) -> mapView.repaint());
         draft.tool().addListener((tool, before, after) -> mapView.repaint());
+        tray.whenLeft(mapView::focus);
         this.running = new RunningModel(outside.tasks()::running);
         this.folio = new Folio(session, outside.tasks(), outside.dialogs(), outside.copies(), shell.theme());
+        KeptLook.of(folio.look(), outside.settings());
+        mapView.lay(folio.plumeMap()::marks);
+        folio.plumeMap().changes().addListener((changes, before, after) -> mapView.repaint());
         this.section = new SectionModel(session, outside.tasks(), draft);
         SectionView sectionView = new SectionView(section, shell.theme());
         this.shelf =
@@ -123,6 +129,7 @@ final class Assembly {
         actions.add(mapView.actions());
         actions.add(new DraftActions(draft, hand, files, tray, mapView::repaint).all(map));
         actions.add(folio.actions());
+        actions.add(IntakeActions.of(intake, mend));
         actions.add(sectionView.actions());
         actions.add(List.of(new Action("actions.group.section", "action.section.show", "F12", shelf::turn)));
         session.sectionLine()

@@ -73,10 +73,7 @@ final class GridFinder {
     private Optional<Axis> axis(Wishes.Topic topic, String text) {
         List<Double> numbers = Numbers.of(text);
         try {
-            boolean even = numbers.size() == 3
-                    && numbers.get(2) == Math.rint(numbers.get(2))
-                    && numbers.get(2) >= 1
-                    && (numbers.get(1) <= numbers.get(0) || numbers.get(2) <= numbers.get(1));
+            boolean even = numbers.size() == 3 && numbers.get(2) == Math.rint(numbers.get(2)) && numbers.get(2) >= 1;
             return Optional.of(
                     even
                             ? Axis.even(

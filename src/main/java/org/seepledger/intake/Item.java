@@ -70,6 +70,15 @@ public sealed interface Item {
             return new Rasters(id, files, names, fields, means, uses);
         }
 
+        Rasters called(String name) {
+            return new Rasters(name, files, names, fields, bands, uses);
+        }
+
+        /** {@return the same without one of its files} */
+        public Rasters without(int file) {
+            return new Rasters(id, except(files, file), except(names, file), fields, bands, uses);
+        }
+
         /** {@return how many bands each of the rasters has at least} */
         public int bandCount() {
             return files.stream().mapToInt(file -> file.bands().size()).min().orElse(0);
@@ -144,6 +153,12 @@ public sealed interface Item {
         public Other with(int index, Use use) {
             return new Other(file, replaced(uses, index, use));
         }
+    }
+
+    private static <T> List<T> except(List<T> list, int index) {
+        List<T> copy = new ArrayList<>(list);
+        copy.remove(index);
+        return copy;
     }
 
     private static <T> List<T> replaced(List<T> list, int index, T other) {

@@ -64,6 +64,17 @@ public record LooseFiles(Path root, List<LooseFile> files) {
         }
     }
 
+    /**
+     * {@return the same without some of the files}
+     *
+     * @param leftOut the paths of those that are left out
+     */
+    public LooseFiles without(Set<Path> leftOut) {
+        return new LooseFiles(
+                root,
+                files.stream().filter(file -> !leftOut.contains(file.path())).toList());
+    }
+
     private static LooseFile link(Path path, String shown) {
         String words = shown + " is a link that leads out of the folder. Bring the file itself.";
         return new LooseFile.Other(path, shown, 0, LooseFile.Kind.STRANGE, words);

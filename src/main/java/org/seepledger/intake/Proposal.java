@@ -1,9 +1,11 @@
 package org.seepledger.intake;
 
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import org.seepledger.intake.Guess.Confidence;
 
 /** Makes items of loose files, and guesses what they are. */
@@ -32,7 +34,19 @@ public final class Proposal {
         List<Item> all = new ArrayList<>();
         series.values().forEach(rasters -> all.addAll(items(rasters)));
         all.addAll(items);
+        name(all);
         return new Plan(found.root(), SurfaceOrder.settled(FieldGuess.settled(all)), Wishes.NONE);
+    }
+
+    /** Rasters of several shapes may be called the same; findings must tell them apart. */
+    private static void name(List<Item> items) {
+        Set<String> taken = new HashSet<>();
+        for (int i = 0; i < items.size(); i++) {
+            if (!taken.add(items.get(i).id()) && items.get(i) instanceof Item.Rasters rasters) {
+                LooseFile.Raster first = rasters.files().get(0);
+                items.set(i, rasters.called(rasters.id() + " (" + first.rows() + " × " + first.columns() + ")"));
+            }
+        }
     }
 
     /** Surfaces that are numbered lie one below the other: each is a thing of its own, in the order of their heights. */

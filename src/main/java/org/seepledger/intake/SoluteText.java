@@ -22,10 +22,8 @@ final class SoluteText {
     List<Object> solutes() {
         Map<String, List<Part>> byName = new LinkedHashMap<>();
         for (Part part : binder.parts(Role.CONCENTRATION)) {
-            boolean ofSource =
-                    part.item().uses().stream().anyMatch(use -> use.role().isSource());
             byName.computeIfAbsent(part.use().name(), name -> new ArrayList<>());
-            if (!ofSource) {
+            if (!Carried.is(part)) {
                 byName.get(part.use().name()).add(part);
             }
         }
@@ -42,7 +40,7 @@ final class SoluteText {
                 .toList();
         binder.joined("concentration of " + name, Optional.empty(), binder.perLayer(plain, Optional.empty()))
                 .ifPresent(json -> solute.put("concentration", json));
-        String unit = parts.get(0).use().unit();
+        String unit = parts.isEmpty() ? "mg/L" : parts.get(0).use().unit();
         if (unit.isEmpty()) {
             findings.accept(Finding.doubt(
                     parts.get(0).item(),

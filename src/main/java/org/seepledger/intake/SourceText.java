@@ -7,6 +7,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.function.Consumer;
 import org.seepledger.intake.Wishes.Topic;
+import org.seepledger.io.table.TableLook;
 
 /** The sources of a set, in the order in which their files stand. */
 final class SourceText {
@@ -15,22 +16,24 @@ final class SourceText {
     private final Binder binder;
     private final Shelf shelf;
     private final Consumer<Finding> findings;
+    private final Carried carried;
 
     SourceText(Plan plan, Binder binder, Shelf shelf, Consumer<Finding> findings) {
         this.plan = plan;
         this.binder = binder;
         this.shelf = shelf;
         this.findings = findings;
+        this.carried = new Carried(binder, findings);
     }
 
     List<Object> sources() {
         List<Object> sources = new ArrayList<>();
-        for (Role role : List.of(Role.AREAL, Role.POINTS, Role.CELLS)) {
-            binder.parts(role).forEach(part -> add(sources, part));
-        }
         String recharge = plan.wishes().of(Topic.RECHARGE);
         if (!recharge.isEmpty()) {
             typed(recharge).ifPresent(sources::add);
+        }
+        for (Role role : List.of(Role.AREAL, Role.POINTS, Role.CELLS)) {
+            binder.parts(role).forEach(part -> add(sources, part));
         }
         return sources;
     }
@@ -63,24 +66,9 @@ final class SourceText {
         }
         rate(part).ifPresent(rate -> {
             source.put("rate", rate);
-            carried(part).ifPresent(carried -> source.put("concentration", carried));
+            carried.by(part).ifPresent(concentrations -> source.put("concentration", concentrations));
             sources.add(source);
         });
-    }
-
-    /** Concentrations in the table of a source are those of what it adds. */
-    private Optional<Object> carried(Part source) {
-        Map<String, Object> carried = new LinkedHashMap<>();
-        for (Part part : binder.parts(Role.CONCENTRATION)) {
-            if (part.item().equals(source.item())) {
-                binder.joined(
-                                "concentration of " + part.use().name(),
-                                Optional.empty(),
-                                binder.perLayer(List.of(part), Optional.empty()))
-                        .ifPresent(json -> carried.put(part.use().name(), json));
-            }
-        }
-        return carried.isEmpty() ? Optional.empty() : Optional.of(carried);
     }
 
     /** Values that tell no layers apart enter the uppermost active cell; those of one layer are none in the others. */
@@ -95,6 +83,18 @@ final class SourceText {
     }
 
     private void checkDates(Item.Table table) {
+        int name = table.places().indexOf(Place.NAME);
+        boolean open = table.places().contains(Place.FROM) && !table.places().contains(Place.TO);
+        if (open && name >= 0) {
+            TableLook look = table.file().look();
+            if (look.columns().get(name).distinct().size() < look.lines()) {
+                findings.accept(Finding.fault(
+                        table,
+                        table.id()
+                                + " gives several rates of the same well and says from when each holds, not until when:"
+                                + " they would add up. Add a column \"to\"."));
+            }
+        }
         boolean dates = false;
         for (int column = 0; column < table.places().size(); column++) {
             Place place = table.places().get(column);

@@ -1,6 +1,5 @@
 package org.seepledger.intake;
 
-import java.util.Locale;
 import org.seepledger.unit.Figures;
 
 /** Names and numbers as sentences have them. */
@@ -11,10 +10,13 @@ final class Wording {
     /** {@return the name that a source, solute or item of storage gets as long as nobody gives it another} */
     static String name(Role role, String from) {
         String words = String.join(" ", Vocabulary.words(from));
-        if (role == Role.SUPPLIED) {
-            return "supplied storage";
-        }
-        return words.isEmpty() ? role.name().toLowerCase(Locale.ROOT) : words;
+        return switch (role) {
+            case SUPPLIED -> "supplied storage";
+            case AREAL -> words.isEmpty() ? "recharge" : words;
+            case CELLS -> words.isEmpty() ? "exchange" : words;
+            case POINTS -> words.isEmpty() ? "pumping" : words;
+            default -> words.isEmpty() ? "solute" : words;
+        };
     }
 
     static String range(double least, double greatest) {

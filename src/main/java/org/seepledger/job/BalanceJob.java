@@ -95,7 +95,8 @@ public final class BalanceJob {
         List<String> files = out.written();
         out.publish();
         String summary = BalanceSummary.of(aquifer, balance, budgets, units, subject.warnings(), subject.notes());
-        return new BalanceOutcome(summary, worst(budgets), files);
+        return new BalanceOutcome(
+                summary, WorstClosure.of(budgets.stream().flatMap(budget -> budget.periods().stream())), files);
     }
 
     /** Writes all files; gives the report's pictures. */
@@ -153,14 +154,5 @@ public final class BalanceJob {
         options.put("wells", request.wells().name().toLowerCase(Locale.ROOT));
         options.put("clip", String.valueOf(request.clip()));
         return options;
-    }
-
-    private static double worst(List<PrismBudget> budgets) {
-        return budgets.stream()
-                .flatMap(budget -> budget.periods().stream())
-                .mapToDouble(period -> Math.abs(period.totals().closureError()))
-                .filter(error -> !Double.isNaN(error))
-                .max()
-                .orElse(Double.NaN);
     }
 }

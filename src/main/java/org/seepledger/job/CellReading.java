@@ -42,6 +42,8 @@ record CellReading(Aquifer aquifer, int interval, int layer, Window window) {
             case SATURATED_THICKNESS -> saturatedThickness();
             case SOURCE -> source(quantity.source());
             case IMBALANCE -> imbalance();
+            case CONCENTRATION, MEAN_CONCENTRATION ->
+                throw new IllegalArgumentException("concentrations are read by solute");
         };
     }
 

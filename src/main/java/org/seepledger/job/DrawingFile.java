@@ -6,6 +6,7 @@ import java.util.Map;
 import org.seepledger.aquifer.GriddedValues;
 import org.seepledger.io.DataFolder;
 import org.seepledger.io.prisms.SurfaceRasters;
+import org.seepledger.sketch.ControlLine;
 import org.seepledger.sketch.Drawing;
 import org.seepledger.sketch.Limit;
 import org.seepledger.sketch.Shape;
@@ -26,6 +27,15 @@ public record DrawingFile(Drawing drawing, Map<Limit.Surface, GriddedValues> sur
     public DrawingFile {
         surfaces = Map.copyOf(surfaces);
         notes = List.copyOf(notes);
+    }
+
+    /**
+     * {@return the same with transects}
+     *
+     * @param lines the transects
+     */
+    public DrawingFile with(List<ControlLine> lines) {
+        return new DrawingFile(drawing.withLines(lines), surfaces, notes);
     }
 
     static DrawingFile of(Drawing drawing, DataFolder folder, SurfaceRasters rasters, List<String> notes) {

@@ -1,5 +1,6 @@
 package org.seepledger.job;
 
+import java.util.stream.DoubleStream;
 import org.seepledger.aquifer.Window;
 
 /**
@@ -9,8 +10,10 @@ import org.seepledger.aquifer.Window;
  * @param stride how many cells a square has along each side; squares at the window's south and east may have fewer
  * @param values the mean over each square's cells that have a value, row-major, row 0 northernmost; {@code NaN} where
  *     none has
+ * @param limits of non-detects, the mean over each square's; {@code NaN} where none is. A square of non-detects alone has no
+ *     value
  */
-public record GridLayer(Window window, int stride, double[] values) {
+public record GridLayer(Window window, int stride, double[] values, double[] limits) {
 
     /**
      * {@return how many rows of squares there are}
@@ -34,6 +37,11 @@ public record GridLayer(Window window, int stride, double[] values) {
      */
     public double at(int row, int column) {
         return values[row * columns() + column];
+    }
+
+    /** {@return whether there is a non-detect anywhere} */
+    public boolean hasNonDetects() {
+        return DoubleStream.of(limits).anyMatch(limit -> !Double.isNaN(limit));
     }
 
     static int squares(int cells, int stride) {

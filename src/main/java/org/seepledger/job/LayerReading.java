@@ -5,6 +5,7 @@ import java.util.Arrays;
 import java.util.List;
 import java.util.function.Function;
 import org.seepledger.aquifer.Aquifer;
+import org.seepledger.aquifer.Solute;
 import org.seepledger.aquifer.Source;
 import org.seepledger.aquifer.Window;
 import org.seepledger.job.MapQuantity.Kind;
@@ -17,10 +18,12 @@ final class LayerReading {
     private static final int CELLS_AT_ONCE = 1 << 18;
 
     private final Aquifer aquifer;
+    private final List<Solute> solutes;
     private final Progress progress;
 
-    LayerReading(Aquifer aquifer, Progress progress) {
+    LayerReading(Aquifer aquifer, List<Solute> solutes, Progress progress) {
         this.aquifer = aquifer;
+        this.solutes = solutes;
         this.progress = progress;
     }
 
@@ -42,19 +45,42 @@ final class LayerReading {
         all.add(new MapQuantity(Kind.THICKNESS, "", length));
         all.add(new MapQuantity(Kind.SATURATED_THICKNESS, "", length));
         all.add(new MapQuantity(Kind.IMBALANCE, "", rate));
+        for (Solute solute : solutes) {
+            String unit = solute.concentration().orElseThrow().unit().toString();
+            all.add(new MapQuantity(Kind.CONCENTRATION, solute.name(), unit));
+            all.add(new MapQuantity(Kind.MEAN_CONCENTRATION, solute.name(), unit));
+        }
         return all;
     }
 
     GridLayer layer(MapQuantity quantity, int layer, int interval, Window window, int stride) {
-        double[][] read = reduced(1, window, stride, band ->
-                new double[][] {new CellReading(aquifer, interval, layer, band).of(quantity)});
-        return new GridLayer(window, stride, read[0]);
+        double[][] read = reduced(2, window, stride, band -> cells(quantity, layer, interval, band));
+        return new GridLayer(window, stride, read[0], read[1]);
+    }
+
+    /** Values of cells, row-major, row 0 northernmost, and the limits of those that are non-detects; NaN where there is none. */
+    double[][] cells(MapQuantity quantity, int layer, int interval, Window window) {
+        return quantity.isConcentration()
+                ? new ConcentrationReading(solute(quantity.source()), aquifer.lengthUnit(), interval, layer, window)
+                        .of(quantity.kind())
+                : new double[][] {
+                    new CellReading(aquifer, interval, layer, window).of(quantity), ConcentrationReading.none(window)
+                };
+    }
+
+    private Solute solute(String name) {
+        return solutes.stream()
+                .filter(solute -> solute.name().equals(name))
+                .findFirst()
+                .orElseThrow();
     }
 
     FluxField flux(int layer, int interval, Window window, int stride) {
         double[][] read =
                 reduced(2, window, stride, band -> new CellReading(aquifer, interval, layer, band).horizontalFlux());
-        return new FluxField(new GridLayer(window, stride, read[0]), new GridLayer(window, stride, read[1]));
+        double[] none = ConcentrationReading.none(window);
+        return new FluxField(
+                new GridLayer(window, stride, read[0], none), new GridLayer(window, stride, read[1], none));
     }
 
     private double[][] reduced(int count, Window window, int stride, Function<Window, double[][]> reading) {

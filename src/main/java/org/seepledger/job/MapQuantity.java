@@ -4,7 +4,7 @@ package org.seepledger.job;
  * What a map can show of an aquifer, layer by layer.
  *
  * @param kind what kind of quantity it is
- * @param source the source's category, for {@link Kind#SOURCE}; else empty
+ * @param source the source's category, for {@link Kind#SOURCE}, or the solute's name, for its concentrations; else empty
  * @param unit its unit, as users write it
  */
 public record MapQuantity(Kind kind, String source, String unit) {
@@ -22,7 +22,11 @@ public record MapQuantity(Kind kind, String source, String unit) {
         /** What sources of one category add to a cell, over its plan area; wells left out. */
         SOURCE,
         /** What a cell gains in the interval that nothing accounts for. */
-        IMBALANCE
+        IMBALANCE,
+        /** Of a solute, at the interval's end. */
+        CONCENTRATION,
+        /** Of a solute, the mean of the interval's two ends: what flows carry. */
+        MEAN_CONCENTRATION
     }
 
     /**
@@ -36,7 +40,14 @@ public record MapQuantity(Kind kind, String source, String unit) {
             case SATURATED_THICKNESS -> "saturated thickness";
             case SOURCE -> source;
             case IMBALANCE -> "imbalance";
+            case CONCENTRATION -> source + ", interval's end";
+            case MEAN_CONCENTRATION -> source + ", mean of both ends";
         };
+    }
+
+    /** {@return whether it is a concentration} */
+    public boolean isConcentration() {
+        return kind == Kind.CONCENTRATION || kind == Kind.MEAN_CONCENTRATION;
     }
 
     /**

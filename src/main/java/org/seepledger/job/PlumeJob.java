@@ -117,7 +117,10 @@ public final class PlumeJob {
         List<String> files = out.written();
         out.publish();
         String summary = PlumeSummary.of(aquifer, results, units, subject.warnings(), subject.notes());
-        return new PlumeOutcome(summary, worst(plumes), files);
+        return new PlumeOutcome(
+                summary,
+                WorstClosure.of(results.stream().flatMap(result -> result.budget().periods().stream())),
+                files);
     }
 
     private List<Solute> solutes() {
@@ -193,19 +196,10 @@ public final class PlumeJob {
         options.put("volume-unit", units.volume().toString());
         options.put("wells", request.wells().name().toLowerCase(Locale.ROOT));
         options.put("dispersion", String.valueOf(request.dispersion()));
-        request.above().ifPresent(threshold -> options.put("above", threshold.value() + " " + threshold.unit()));
+        request.above().ifPresent(threshold -> options.put("above", threshold.toString()));
         request.transects().ifPresent(file -> options.put("transects", file.toString()));
         request.panels().ifPresent(file -> options.put("panels", file.toString()));
         options.put("clip", String.valueOf(request.clip()));
         return options;
-    }
-
-    private double worst(List<Plume> plumes) {
-        return plumes.stream()
-                .flatMap(plume -> periods.stream().map(plume.ledger()::budget))
-                .mapToDouble(budget -> Math.abs(budget.totals().closureError()))
-                .filter(error -> !Double.isNaN(error))
-                .max()
-                .orElse(Double.NaN);
     }
 }

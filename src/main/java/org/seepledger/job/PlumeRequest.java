@@ -88,5 +88,11 @@ public record PlumeRequest(
         public double kilograms(Measure length) {
             return value / MassUnits.concentrationFactor(unit, length);
         }
+
+        /** {@return number and unit, as it is typed} */
+        @Override
+        public String toString() {
+            return value + " " + unit;
+        }
     }
 }

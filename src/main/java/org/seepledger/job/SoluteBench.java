@@ -2,17 +2,22 @@ package org.seepledger.job;
 
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
 import java.util.function.Function;
 import org.seepledger.aquifer.Aquifer;
+import org.seepledger.aquifer.CellGeometry;
+import org.seepledger.aquifer.Concentration;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.KnownCells;
+import org.seepledger.aquifer.Saturation;
 import org.seepledger.aquifer.Solute;
 import org.seepledger.aquifer.Window;
 import org.seepledger.balance.Span;
+import org.seepledger.balance.Trace;
 import org.seepledger.balance.WellRule;
 import org.seepledger.io.aquifer.AquiferFolder;
 import org.seepledger.io.prisms.PrismsReader;
@@ -20,7 +25,11 @@ import org.seepledger.io.prisms.TransectsReader;
 import org.seepledger.io.prisms.TransectsWriter;
 import org.seepledger.io.result.MassUnits;
 import org.seepledger.io.table.MeasuredPanels;
+import org.seepledger.ledger.Period;
+import org.seepledger.picture.Drape;
+import org.seepledger.picture.ThresholdOutline;
 import org.seepledger.plume.Crossing;
+import org.seepledger.plume.NonDetects;
 import org.seepledger.plume.Plume;
 import org.seepledger.plume.SoluteBalance;
 import org.seepledger.plume.TransectFlows;
@@ -120,6 +129,52 @@ public final class SoluteBench {
     }
 
     /**
+     * Traces a row of a solute's budget of a prism to the stored concentrations that it rests on.
+     *
+     * @param prism the prism; what lies beyond the grid is cut off
+     * @param solute the solute's name
+     * @param row the row, as {@code PRISM/PERIOD/GROUP/ITEM/LAYER}
+     * @param periods the periods that one of is named
+     * @param choice how solutes are balanced
+     * @param units the units of results
+     * @param most how many values are kept, those that contribute the most
+     * @param progress told how far the work is
+     * @return the number and its values
+     * @throws org.seepledger.fault.UsageFault if there is no such row, or it has no weights
+     * @throws org.seepledger.fault.DataFault if the data are wrong
+     * @throws org.seepledger.progress.Cancelled if the work was stopped
+     */
+    public TracedNumber trace(
+            Prism prism,
+            String solute,
+            String row,
+            List<Period> periods,
+            Choice choice,
+            MassUnits units,
+            int most,
+            Progress progress) {
+        return gate.ask(progress, until -> {
+            Prism admitted = readers.apply(new ArrayList<>()).admitted(prism);
+            SoluteRow named = SoluteRow.of(
+                    new SoluteRow.Budget(aquifer(), solutes, solute, options(choice, Workbench.threads()), units),
+                    row,
+                    List.of(admitted),
+                    periods,
+                    until);
+            LargestLines lines = new LargestLines(most);
+            Trace.Sum sum = named.trace(lines, until);
+            return new TracedNumber(
+                    row,
+                    named.period(),
+                    named.net(),
+                    TracedNumber.Units.of(units),
+                    sum.value(),
+                    sum.lines(),
+                    lines.lines());
+        });
+    }
+
+    /**
      * Balances all solutes in prisms over the whole record.
      *
      * @param prisms at least one prism; what lies beyond the grid is cut off
@@ -159,6 +214,50 @@ public final class SoluteBench {
                 : Span.all(aquifer().times());
         Function<Window, KnownCells> known = interval.isPresent() ? kept : window -> aquifer();
         return gate.ask(progress, until -> TransectFlows.of(aquifer(), known, span, solutes, transects, until));
+    }
+
+    /**
+     * {@return the outline of the cells of a layer with more than a concentration at an interval's end, non-detects counted as
+     * half their limit: the cells that a budget counts in}
+     *
+     * @param solute the solute
+     * @param layer the layer, from 0
+     * @param interval the interval, from 0
+     * @param above the concentration, kg/length³
+     * @param progress told how far the work is
+     * @throws org.seepledger.fault.DataFault if the data are wrong
+     * @throws org.seepledger.progress.Cancelled if the work was stopped
+     */
+    public ThresholdOutline outline(Solute solute, int layer, int interval, double above, Progress progress) {
+        return gate.ask(progress, until -> {
+            until.begin("outlining a plume", 1);
+            Grid grid = aquifer().grid();
+            double[] values = wetConcentrations(solute, layer, interval);
+            until.step();
+            int columns = grid.columns();
+            Drape drape = Drape.of(
+                    grid,
+                    grid.window(),
+                    Math.max(grid.rows(), columns),
+                    row -> Arrays.copyOfRange(values, row * columns, (row + 1) * columns));
+            return ThresholdOutline.of(drape, above);
+        });
+    }
+
+    /** In kg/length³; none where a cell holds no water at the interval's end. */
+    private double[] wetConcentrations(Solute solute, int layer, int interval) {
+        Window all = aquifer().grid().window();
+        CellGeometry geometry = aquifer().geometry(all);
+        Saturation saturation = aquifer().saturation(interval, geometry);
+        Concentration.AtInstant found = solute.concentration().orElseThrow().at(interval + 1, layer, all);
+        double[] values = found.values();
+        for (int cell = 0; cell < values.length; cell++) {
+            boolean wet = saturation.thickness(layer * all.size() + cell) > 0;
+            double limit = found.limits()[cell];
+            double value = Double.isNaN(limit) ? values[cell] : NonDetects.HALF.of(limit);
+            values[cell] = wet ? value : Double.NaN;
+        }
+        return values;
     }
 
     /**

@@ -214,14 +214,14 @@ public final class Workbench implements AutoCloseable {
     }
 
     /**
-     * Makes sure that a file holds a drawing and nothing else.
+     * Makes sure that a file holds the prisms of a drawing and no others.
      *
      * @param file the file
      * @param drawing the drawing
      * @throws UsageFault if it does not
      */
     public void mustHold(Path file, Drawing drawing) {
-        if (!drawing(file).drawing().equals(drawing)) {
+        if (!drawing(file).drawing().shapes().equals(drawing.shapes())) {
             throw new UsageFault("The file " + file + " holds other prisms than are drawn: it was changed meanwhile."
                     + " Save the drawing, then go on.");
         }
@@ -353,7 +353,14 @@ public final class Workbench implements AutoCloseable {
                     lines,
                     until);
             number.mustBe(sum);
-            return new TracedNumber(row, named.period(), number.net(), units, sum.value(), sum.lines(), lines.lines());
+            return new TracedNumber(
+                    row,
+                    named.period(),
+                    number.net(),
+                    TracedNumber.Units.of(units),
+                    sum.value(),
+                    sum.lines(),
+                    lines.lines());
         });
     }
 
@@ -364,7 +371,7 @@ public final class Workbench implements AutoCloseable {
      */
     public List<MapQuantity> quantities() {
         gate.mustBeOpen();
-        return new LayerReading(aquifer(), Progress.NONE).quantities();
+        return new LayerReading(aquifer(), solutes.solutes(), Progress.NONE).quantities();
     }
 
     /**
@@ -383,7 +390,9 @@ public final class Workbench implements AutoCloseable {
     public GridLayer layer(
             MapQuantity quantity, int layer, int interval, Window window, int stride, Progress progress) {
         return gate.ask(
-                progress, until -> new LayerReading(aquifer(), until).layer(quantity, layer, interval, window, stride));
+                progress,
+                until -> new LayerReading(aquifer(), solutes.solutes(), until)
+                        .layer(quantity, layer, interval, window, stride));
     }
 
     /**
@@ -411,7 +420,9 @@ public final class Workbench implements AutoCloseable {
      * @throws Cancelled if the work was stopped
      */
     public FluxField flux(int layer, int interval, Window window, int stride, Progress progress) {
-        return gate.ask(progress, until -> new LayerReading(aquifer(), until).flux(layer, interval, window, stride));
+        return gate.ask(
+                progress,
+                until -> new LayerReading(aquifer(), solutes.solutes(), until).flux(layer, interval, window, stride));
     }
 
     /**
@@ -435,8 +446,8 @@ public final class Workbench implements AutoCloseable {
      * @throws Cancelled if the work was stopped
      */
     public Profile profile(SectionLine line, Optional<MapQuantity> quantity, int interval, Progress progress) {
-        Optional<Profile.LayerValues> values =
-                quantity.map(shown -> (layer, window) -> new CellReading(aquifer(), interval, layer, window).of(shown));
+        Optional<Profile.LayerValues> values = quantity.map(shown -> (layer, window) ->
+                new LayerReading(aquifer(), solutes.solutes(), Progress.NONE).cells(shown, layer, interval, window)[0]);
         return gate.ask(progress, until -> Profile.along(line, aquifer(), interval, interval + 1, values, until));
     }
 

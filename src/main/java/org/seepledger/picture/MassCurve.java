@@ -4,6 +4,8 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.OptionalInt;
 import java.util.function.ToDoubleFunction;
 import java.util.stream.DoubleStream;
 import org.seepledger.aquifer.Times;
@@ -17,8 +19,8 @@ import org.seepledger.plume.Stock;
 import org.seepledger.unit.Figures;
 
 /**
- * What a prism holds of a solute through time: in all and dissolved, and the band between non-detects counted as 0 and as
- * their limit.
+ * What a prism holds of a solute through time: in all, dissolved and sorbed, and the band between non-detects counted as 0 and
+ * as their limit.
  */
 public final class MassCurve {
 
@@ -26,6 +28,8 @@ public final class MassCurve {
     private static final double TOP = 8;
     private static final Stroke ALL = Stroke.of(Ink.Token.TEXT, 2);
     private static final Stroke DISSOLVED = Stroke.of(Ink.Token.PLUME, 2).dashed(6.0, 3.0);
+    private static final Stroke SORBED = Stroke.of(Ink.Token.MUTED, 2).dashed(2.0, 3.0);
+    private static final double LOWEST = 60;
     private static final Fill BRACKET = new Fill(Ink.Token.PLUME, 1, Texture.RISING);
 
     private final Plume plume;
@@ -33,13 +37,27 @@ public final class MassCurve {
     private final String unit;
     private final double factor;
     private final double width;
+    private final OptionalDouble height;
+    private final OptionalInt interval;
+    private final Picture picture;
+    private TimeAxis time;
 
-    private MassCurve(Plume plume, Times times, String unit, double factor, double width) {
+    private MassCurve(
+            Plume plume,
+            Times times,
+            String unit,
+            double factor,
+            double width,
+            OptionalDouble height,
+            OptionalInt interval) {
         this.plume = plume;
         this.times = times;
         this.unit = unit;
         this.factor = factor;
         this.width = width;
+        this.height = height;
+        this.interval = interval;
+        this.picture = draw();
     }
 
     /**
@@ -52,7 +70,42 @@ public final class MassCurve {
      * @param width in logical pixels, at least 340
      */
     public static Picture of(Plume plume, Times times, String unit, double factor, double width) {
-        return new MassCurve(plume, times, unit, factor, width).picture();
+        return new MassCurve(plume, times, unit, factor, width, OptionalDouble.empty(), OptionalInt.empty()).picture;
+    }
+
+    /**
+     * {@return the curves in a given room, with an interval marked}
+     *
+     * @param plume what a prism holds
+     * @param times the record's instants
+     * @param unit the unit of masses as it is written
+     * @param factor how many of it a kilogram is
+     * @param interval the interval to mark, from 0
+     * @param width in logical pixels, at least 300
+     * @param height in logical pixels; the picture is higher where it could not be read otherwise
+     */
+    public static MassCurve of(
+            Plume plume, Times times, String unit, double factor, int interval, double width, double height) {
+        return new MassCurve(plume, times, unit, factor, width, OptionalDouble.of(height), OptionalInt.of(interval));
+    }
+
+    /** {@return what it looks like} */
+    public Picture picture() {
+        return picture;
+    }
+
+    /**
+     * {@return the interval at a place in the picture, if there is one}
+     *
+     * @param x in logical pixels from the picture's left edge
+     */
+    public OptionalInt intervalAt(double x) {
+        for (int i = 0; i < times.intervals(); i++) {
+            if (x >= time.x(times.instant(i)) && x < time.x(times.instant(i + 1))) {
+                return OptionalInt.of(i);
+            }
+        }
+        return OptionalInt.empty();
     }
 
     private double[] masses(ToDoubleFunction<Stock> what) {
@@ -63,21 +116,24 @@ public final class MassCurve {
         return masses;
     }
 
-    private Picture picture() {
+    private Picture draw() {
         double[] all = masses(stock -> stock.total(NonDetects.HALF));
         double[] dissolved = masses(stock -> stock.dissolved(NonDetects.HALF));
         double[] least = masses(stock -> stock.total(NonDetects.ZERO));
         double[] most = masses(stock -> stock.total(NonDetects.LIMIT));
         boolean bracketed = !Arrays.equals(least, most);
         boolean sorbs = plume.solute().sorption().isPresent();
-        double high = width >= 600 ? 190 : 160;
+        double[] sorbed = masses(stock -> stock.sorbed(NonDetects.HALF));
+        double usual = width >= 600 ? 190 : 160;
         double greatest = DoubleStream.of(most).max().orElse(0);
-        double left = 12 + new ValueAxis(0, greatest, 0, high).labelWidth(true);
+        double left = 12 + new ValueAxis(0, greatest, 0, usual).labelWidth(true);
         double right = width - RIGHT;
         List<Mark> marks = new ArrayList<>();
-        double keyEnd = key(left, right, sorbs, bracketed, all, dissolved, marks);
+        double keyEnd = key(left, right, sorbs, bracketed, marks, all, dissolved, sorbed);
+        double high = height.isPresent() ? Math.max(LOWEST, height.getAsDouble() - keyEnd - TOP - 30) : usual;
         ValueAxis axis = new ValueAxis(0, greatest, keyEnd + TOP, high);
-        TimeAxis time = new TimeAxis(List.of(new Periods(times).record()), times, left, right);
+        time = new TimeAxis(List.of(new Periods(times).record()), times, left, right);
+        interval.ifPresent(looked -> mark(looked, keyEnd + TOP, high, marks));
         axis.draw(left, right, true, marks);
         if (bracketed) {
             marks.add(new Mark.Area(
@@ -87,6 +143,7 @@ public final class MassCurve {
         }
         if (sorbs) {
             marks.add(new Mark.Line(curve(dissolved, time, axis), DISSOLVED));
+            marks.add(new Mark.Line(curve(sorbed, time, axis), SORBED));
         }
         double[] line = curve(all, time, axis);
         marks.add(new Mark.Line(line, ALL));
@@ -107,12 +164,13 @@ public final class MassCurve {
             double right,
             boolean sorbs,
             boolean bracketed,
+            List<Mark> marks,
             double[] all,
             double[] dissolved,
-            List<Mark> marks) {
+            double[] sorbed) {
         Key key = new Key(left, right, 0, marks).line(ALL, "mass in place, " + last(all));
         if (sorbs) {
-            key.line(DISSOLVED, "of it dissolved, " + last(dissolved));
+            key.line(DISSOLVED, "dissolved, " + last(dissolved)).line(SORBED, "sorbed, " + last(sorbed));
         }
         if (bracketed) {
             key.filled(BRACKET, "non-detects counted from 0 to their limit");
@@ -120,8 +178,20 @@ public final class MassCurve {
         return key.end();
     }
 
+    /** What there is at the end of what is looked at. */
     private String last(double[] masses) {
-        return "in the end " + Figures.typeset(masses[masses.length - 1]) + " " + unit;
+        int instant = interval.orElse(times.intervals() - 1) + 1;
+        String when = interval.isPresent() ? "then " : "in the end ";
+        return when + Figures.typeset(masses[instant]) + " " + unit;
+    }
+
+    private void mark(int looked, double top, double high, List<Mark> marks) {
+        double from = time.x(times.instant(looked));
+        double to = time.x(times.instant(looked + 1));
+        marks.add(Mark.Area.of(new Box(from, top, to - from, high), new Fill(Ink.Token.ACCENT, 0.14, Texture.PLAIN)));
+        for (double x : new double[] {from, to}) {
+            marks.add(new Mark.Line(new double[] {x, top, x, top + high}, Stroke.of(Ink.Token.ACCENT, 1.4)));
+        }
     }
 
     private double[] curve(double[] masses, TimeAxis time, ValueAxis axis) {

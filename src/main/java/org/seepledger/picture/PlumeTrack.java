@@ -5,14 +5,16 @@ import java.util.List;
 import java.util.Optional;
 import org.seepledger.picture.Mark.Fill;
 import org.seepledger.picture.Mark.Stroke;
+import org.seepledger.plume.Course;
 
 /**
- * The way of a plume's centre of mass: a line with a dot for each instant, hollow at the first and large at the last, and
- * about the last an ellipse as wide as one standard deviation along each principal axis.
+ * The way of a plume's centre of mass: a line with a dot for each instant, hollow at the first and large at the one looked at,
+ * and about that an ellipse as wide as one standard deviation along each principal axis.
  *
- * @param stops the centre at each instant; instants without mass are left out
+ * @param stops the centre at each instant that has a place
+ * @param current which of them is looked at; -1 for none
  */
-public record PlumeTrack(List<Stop> stops) {
+public record PlumeTrack(List<Stop> stops, int current) {
 
     private static final double SMALL = 10;
     private static final double DOT = 2.2;
@@ -32,6 +34,17 @@ public record PlumeTrack(List<Stop> stops) {
      */
     public record Stop(double mapX, double mapY, double along, double across, double direction, String name) {
 
+        /**
+         * {@return a plume's centre as a stop}
+         *
+         * @param at the plume at an instant
+         * @param planUnit how many length units a plan unit has
+         * @param name the instant; empty for none
+         */
+        public static Stop of(Course.Place at, double planUnit, String name) {
+            return new Stop(at.x(), at.y(), at.along() / planUnit, at.across() / planUnit, at.direction(), name);
+        }
+
         /** {@return map x and y in turn of an ellipse as wide as one standard deviation, without its first place again} */
         public double[] ellipse() {
             double[] ring = new double[2 * CORNERS];
@@ -46,9 +59,33 @@ public record PlumeTrack(List<Stop> stops) {
         }
     }
 
-    /** Leaves out the stops that have no place. */
+    /** Copies the list. */
     public PlumeTrack {
-        stops = stops.stream()
+        stops = List.copyOf(stops);
+    }
+
+    /**
+     * Looks at the last instant.
+     *
+     * @param stops the centre at each instant; instants without mass are left out
+     */
+    public PlumeTrack(List<Stop> stops) {
+        this(placed(stops), placed(stops).size() - 1);
+    }
+
+    /**
+     * {@return the track, looked at at an instant}
+     *
+     * @param stops the centre at each instant; instants without mass are left out
+     * @param instant the instant, from 0
+     */
+    public static PlumeTrack at(List<Stop> stops, int instant) {
+        List<Stop> placed = placed(stops);
+        return new PlumeTrack(placed, placed.indexOf(stops.get(instant)));
+    }
+
+    private static List<Stop> placed(List<Stop> stops) {
+        return stops.stream()
                 .filter(stop -> Double.isFinite(stop.mapX() + stop.mapY()))
                 .toList();
     }
@@ -57,27 +94,32 @@ public record PlumeTrack(List<Stop> stops) {
      * {@return the track as marks, the lowermost first}
      *
      * @param frame where map coordinates come to
-     * @param labels where the names of the last, the first and then the other instants find room
+     * @param labels where the names of the instant looked at, the first and then the others find room
      */
     public List<Mark> marks(MapFrame frame, Labels labels) {
         List<Mark> marks = new ArrayList<>();
         if (stops.isEmpty()) {
             return marks;
         }
-        spread(frame, marks);
+        if (current >= 0) {
+            spread(frame, marks);
+        }
         double[] way = way(frame);
         if (stops.size() > 1) {
             marks.add(new Mark.Line(way, Stroke.of(Ink.Token.PAPER, RIM)));
             marks.add(new Mark.Line(way, stroke()));
         }
-        int last = stops.size() - 1;
-        for (int stop = 0; stop <= last; stop++) {
-            marks.add(dot(way, stop, last));
+        for (int stop = 0; stop < stops.size(); stop++) {
+            marks.add(dot(way, stop));
         }
-        labels.keepFree(new Box(way[2 * last] - END, way[2 * last + 1] - END, 2 * END, 2 * END));
-        name(last, way, labels, marks);
-        for (int stop = 0; stop < last; stop++) {
-            name(stop, way, labels, marks);
+        if (current >= 0) {
+            labels.keepFree(new Box(way[2 * current] - END, way[2 * current + 1] - END, 2 * END, 2 * END));
+            name(current, way, labels, marks);
+        }
+        for (int stop = 0; stop < stops.size(); stop++) {
+            if (stop != current) {
+                name(stop, way, labels, marks);
+            }
         }
         return marks;
     }
@@ -97,9 +139,9 @@ public record PlumeTrack(List<Stop> stops) {
     }
 
     private void spread(MapFrame frame, List<Mark> marks) {
-        Stop last = stops.get(stops.size() - 1);
-        if (last.along() > 0) {
-            List<double[]> ring = List.of(frame.drawn(last.ellipse()));
+        Stop seen = stops.get(current);
+        if (seen.along() > 0) {
+            List<double[]> ring = List.of(frame.drawn(seen.ellipse()));
             marks.add(new Mark.Area(ring, Optional.empty(), Optional.of(Stroke.of(Ink.Token.PAPER, 3))));
             marks.add(new Mark.Area(
                     ring,
@@ -108,9 +150,9 @@ public record PlumeTrack(List<Stop> stops) {
         }
     }
 
-    private static Mark dot(double[] way, int stop, int last) {
-        double radius = stop == last ? END : stop == 0 ? END - 1 : DOT;
-        boolean hollow = stop == 0 && last > 0;
+    private Mark dot(double[] way, int stop) {
+        double radius = stop == current ? END : stop == 0 ? END - 1 : DOT;
+        boolean hollow = stop == 0 && stops.size() > 1;
         return new Mark.Area(
                 List.of(MapSheet.round(way[2 * stop], way[2 * stop + 1], radius)),
                 Optional.of(Fill.of(hollow ? Ink.Token.PAPER : Ink.Token.TEXT)),

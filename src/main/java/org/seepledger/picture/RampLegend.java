@@ -37,7 +37,7 @@ public final class RampLegend {
         legend.marks.add(title(words, place));
         legend.strip(strip, new double[] {strip.width() / COLOURS, 0, 0, STRIP, strip.x(), strip.y()}, opacity);
         Labels labels = new Labels(new Box(place.x() - 2, strip.bottom() - 2, place.width() + 4, 34));
-        Ticks ticks = levelTicks(scale, place.width());
+        RoundValues ticks = levelTicks(scale, place.width());
         for (int i = 0; i < ticks.count(); i++) {
             double x = strip.x() + scale.share(ticks.values().get(i)) * strip.width();
             double half = Lettering.width(ticks.label(i), SIZE) / 2;
@@ -51,10 +51,10 @@ public final class RampLegend {
     }
 
     /** {@return as many ticks as have room for their labels} */
-    private static Ticks levelTicks(ValueScale scale, double length) {
-        Ticks best = scale.ticks(3);
+    private static RoundValues levelTicks(ValueScale scale, double length) {
+        RoundValues best = scale.ticks(3);
         for (int most = 4; most <= 12; most++) {
-            Ticks finer = scale.ticks(most);
+            RoundValues finer = scale.ticks(most);
             double room = 0;
             for (int i = 0; i < finer.count(); i++) {
                 room += Lettering.width(finer.label(i), SIZE) + SIZE;

@@ -19,6 +19,9 @@ final class SectionColours {
             double[] values = stretch.column().values();
             double[] surfaces = stretch.column().surfaces();
             for (int layer = 0; layer < values.length && right > left; layer++) {
+                if (!(surfaces[layer] > surfaces[layer + 1])) {
+                    continue;
+                }
                 int colour = colours.scale().argb(values[layer], 1);
                 double top = Math.min(surfaces[layer], section.level(stretch.column(), layer));
                 int upper = pixel(frame.y(top) - box.y(), height);

@@ -13,7 +13,7 @@ import java.util.Locale;
  * @param step how far they are apart
  * @param count how many there are
  */
-public record Ticks(BigDecimal first, BigDecimal step, int count) {
+public record Ticks(BigDecimal first, BigDecimal step, int count) implements RoundValues {
 
     private static final int LARGEST_PLAIN = 7;
     private static final int SMALLEST_PLAIN = 5;
@@ -54,7 +54,7 @@ public record Ticks(BigDecimal first, BigDecimal step, int count) {
         }
     }
 
-    /** {@return their values} */
+    @Override
     public List<Double> values() {
         List<Double> values = new ArrayList<>();
         for (int i = 0; i < count; i++) {
@@ -68,6 +68,7 @@ public record Ticks(BigDecimal first, BigDecimal step, int count) {
      *
      * @param index which, from 0
      */
+    @Override
     public String label(int index) {
         BigDecimal value = value(index);
         int power = step.precision() - step.scale() - 1;

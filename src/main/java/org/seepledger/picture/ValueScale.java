@@ -9,19 +9,47 @@ import java.util.stream.DoubleStream;
  * @param ramp the colours
  * @param from the value at the ramp's beginning
  * @param to the value at its end, beyond {@code from}
+ * @param logarithmic whether equal ratios take equal parts of the ramp, rather than equal differences
  */
-public record ValueScale(Ramp ramp, double from, double to) {
+public record ValueScale(Ramp ramp, double from, double to, boolean logarithmic) {
 
     private static final double SHOWN = 0.98;
 
     /** Values that differ by less than this share of their size are one value and its rounding. */
     private static final double ROUNDING = 1e-9;
 
-    /** Refuses an empty range. */
+    /** What is less than this part of the greatest value has no colours of its own on a logarithmic scale. */
+    private static final double DEEPEST = 1e-4;
+
+    /** Refuses an empty range, and a logarithmic one that does not begin above 0. */
     public ValueScale {
-        if (!(to > from)) {
+        if (!(to > from) || logarithmic && !(from > 0)) {
             throw new IllegalArgumentException("no range from " + from + " to " + to);
         }
+    }
+
+    /**
+     * Makes a scale of equal differences.
+     *
+     * @param ramp the colours
+     * @param from the value at the ramp's beginning
+     * @param to the value at its end, beyond {@code from}
+     */
+    public ValueScale(Ramp ramp, double from, double to) {
+        this(ramp, from, to, false);
+    }
+
+    /**
+     * {@return a logarithmic scale in the same colours, to the greatest of some values and over four powers of ten at most; this
+     * one where none is above 0}
+     *
+     * @param values the values; those that are not finite do not count
+     */
+    public ValueScale logarithmicOver(double[] values) {
+        double greatest = finite(values).max().orElse(0);
+        double least = finite(values).filter(value -> value > 0).min().orElse(0);
+        double begin = Math.max(least, DEEPEST * greatest);
+        return greatest > 0 ? new ValueScale(ramp, Math.min(begin, 0.1 * greatest), greatest, true) : this;
     }
 
     /**
@@ -88,7 +116,7 @@ public record ValueScale(Ramp ramp, double from, double to) {
      * @param value the value
      */
     public double share(double value) {
-        return (value - from) / (to - from);
+        return logarithmic ? Math.log(Math.max(value, 0) / from) / Math.log(to / from) : (value - from) / (to - from);
     }
 
     /**
@@ -97,7 +125,7 @@ public record ValueScale(Ramp ramp, double from, double to) {
      * @param share 0 at its beginning and 1 at its end
      */
     public double at(double share) {
-        return from + share * (to - from);
+        return logarithmic ? from * Math.pow(to / from, share) : from + share * (to - from);
     }
 
     /**
@@ -105,7 +133,7 @@ public record ValueScale(Ramp ramp, double from, double to) {
      *
      * @param most how many there may be, at least 2
      */
-    public Ticks ticks(int most) {
-        return Ticks.within(from, to, most);
+    public RoundValues ticks(int most) {
+        return logarithmic ? LogTicks.within(from, to, most) : Ticks.within(from, to, most);
     }
 }

@@ -2,44 +2,42 @@ package org.seepledger.plume;
 
 import org.seepledger.aquifer.Window;
 import org.seepledger.balance.Bookings;
+import org.seepledger.balance.SumsByColumn;
 
 /** What each column of cells books of a row: a sum of accounts' nets, each so many times. */
 final class NetByColumn implements Bookings {
 
     private final double[] row;
-    private final Window window;
-    private final double[] sums;
-    private int column;
+    private final SumsByColumn sums;
 
     NetByColumn(double[] row, Window window) {
         this.row = row;
-        this.window = window;
-        this.sums = new double[window.size()];
+        this.sums = new SumsByColumn(window);
     }
 
     /** The sum of a column of cells. */
     double get(int cellRow, int cellColumn) {
-        return sums[window.index(cellRow, cellColumn)];
+        return sums.get(cellRow, cellColumn);
     }
 
     @Override
     public void at(int cellRow, int cellColumn) {
-        column = window.index(cellRow, cellColumn);
+        sums.at(cellRow, cellColumn);
     }
 
     @Override
     public void throughPiece(int account, double start, double end) {
-        sums[column] -= row[account] * 0.5 * (start + end);
+        sums.add(-row[account] * 0.5 * (start + end));
     }
 
     @Override
     public void throughFace(int account, double out) {
-        sums[column] -= row[account] * out;
+        sums.add(-row[account] * out);
     }
 
     @Override
     public void added(int account, double rate) {
-        sums[column] += row[account] * rate;
+        sums.add(row[account] * rate);
     }
 
     @Override

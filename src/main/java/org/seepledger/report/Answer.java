@@ -3,17 +3,22 @@ package org.seepledger.report;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.Stream;
+import org.seepledger.io.result.MassUnits;
 
 /**
  * What a budget says, in sentences: facts in the order in which a reader asks for them, without a grade.
  *
- * @param prism the prism
+ * @param prism the prism, or the solute and the prism
  * @param points the sentences, in order
  */
 public record Answer(String prism, List<Point> points) {
 
     /** What a sentence answers. */
     public enum Topic {
+        /** How much is there of a solute? */
+        HELD("How much is there?"),
+        /** How much of that rests on non-detects? */
+        UNDETECTED("What rests on non-detects?"),
         /** Does it close? */
         CLOSURE("Does it close?"),
         /** What dominates? */
@@ -22,6 +27,10 @@ public record Answer(String prism, List<Point> points) {
         STORAGE("What changed in storage?"),
         /** What goes to and comes from other prisms? */
         EXCHANGE("What do other prisms give and take?"),
+        /** Where does a plume go? */
+        PATH("Where does it go?"),
+        /** Does its mass change? */
+        TREND("Does it fall or rise?"),
         /** What can the budget not carry? */
         LIMITS("What can this budget not carry?");
 
@@ -65,6 +74,27 @@ public record Answer(String prism, List<Point> points) {
         add(points, Topic.EXCHANGE, new ExchangeWords(result, wording).sentences());
         add(points, Topic.LIMITS, new LimitWords(result, origins, wording).sentences());
         return new Answer(result.prism(), points);
+    }
+
+    /**
+     * {@return what a solute's budget says}
+     *
+     * @param result the result for a prism and solute
+     * @param units the units to give
+     * @param wording how numbers are written, with the units of the budget
+     */
+    public static Answer of(PlumeResult result, MassUnits units, Wording wording) {
+        List<Point> points = new ArrayList<>();
+        HoldingWords holding = new HoldingWords(result, units, wording);
+        TrendWords trend = new TrendWords(result, units, wording);
+        add(points, Topic.HELD, holding.held());
+        add(points, Topic.UNDETECTED, holding.undetected());
+        add(points, Topic.CLOSURE, new SoluteClosureWords(result, wording).sentences());
+        add(points, Topic.DOMINANT, new DominanceWords(result.budget(), wording).sentences());
+        add(points, Topic.PATH, trend.path());
+        add(points, Topic.TREND, trend.trend());
+        add(points, Topic.LIMITS, new SoluteLimitWords(result, wording).sentences());
+        return new Answer(result.name(), points);
     }
 
     private static void add(List<Point> points, Topic topic, List<String> sentences) {

@@ -9,28 +9,100 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.function.Consumer;
+import java.util.function.Predicate;
 import java.util.function.UnaryOperator;
 import java.util.stream.Collectors;
 
 /**
- * The prisms that a person has drawn, in their order. Every edit is a new drawing; what it leaves alone is shared.
+ * The prisms that a person has drawn, in their order, and the transects. Every edit is a new drawing; what it leaves alone is
+ * shared.
  *
  * @param shapes the shapes, whose names differ; later ones lie on top
+ * @param lines the transects, whose names differ
  */
-public record Drawing(List<Shape> shapes) {
+public record Drawing(List<Shape> shapes, List<ControlLine> lines) {
 
     /** A drawing without shapes. */
     public static final Drawing EMPTY = new Drawing(List.of());
 
-    /** Refuses two shapes of one name. */
+    /** Refuses two shapes or two transects of one name. */
     public Drawing {
         shapes = List.copyOf(shapes);
+        lines = List.copyOf(lines);
         Set<String> names = new HashSet<>();
         for (Shape shape : shapes) {
             if (!names.add(shape.name())) {
                 throw new Refusal("There is a prism \"" + shape.name() + "\" already.");
             }
         }
+        Set<String> lineNames = new HashSet<>();
+        for (ControlLine line : lines) {
+            if (!lineNames.add(line.name())) {
+                throw new Refusal("There is a transect \"" + line.name() + "\" already.");
+            }
+        }
+    }
+
+    /**
+     * Makes a drawing of prisms alone.
+     *
+     * @param shapes the shapes, whose names differ; later ones lie on top
+     */
+    public Drawing(List<Shape> shapes) {
+        this(shapes, List.of());
+    }
+
+    /**
+     * {@return the transect of a name, if there is one}
+     *
+     * @param name the name
+     */
+    public Optional<ControlLine> line(String name) {
+        return lines.stream().filter(line -> line.name().equals(name)).findFirst();
+    }
+
+    /**
+     * {@return the drawing with other transects}
+     *
+     * @param others the transects
+     * @throws Refusal if two have one name
+     */
+    public Drawing withLines(List<ControlLine> others) {
+        return new Drawing(shapes, others);
+    }
+
+    /**
+     * {@return the drawing with one more transect}
+     *
+     * @param line the transect; a name that is taken gets a number
+     */
+    public Drawing with(ControlLine line) {
+        List<ControlLine> more = new ArrayList<>(lines);
+        more.add(line.named(free(line.name(), name -> line(name).isPresent())));
+        return withLines(more);
+    }
+
+    /**
+     * {@return the drawing without a transect}
+     *
+     * @param name its name
+     */
+    public Drawing withoutLine(String name) {
+        return withLines(
+                lines.stream().filter(line -> !line.name().equals(name)).toList());
+    }
+
+    /**
+     * {@return the drawing with one transect changed}
+     *
+     * @param name its name
+     * @param change gives the transect that takes its place
+     * @throws Refusal if the change is refused
+     */
+    public Drawing editLine(String name, UnaryOperator<ControlLine> change) {
+        return withLines(lines.stream()
+                .map(line -> line.name().equals(name) ? change.apply(line) : line)
+                .toList());
     }
 
     /** {@return the surfaces that its shapes name, each once} */
@@ -85,8 +157,12 @@ public record Drawing(List<Shape> shapes) {
      * @param name the name
      */
     public String freeName(String name) {
+        return free(name, taken -> find(taken).isPresent());
+    }
+
+    private static String free(String name, Predicate<String> taken) {
         String free = name;
-        for (int number = 2; find(free).isPresent(); number++) {
+        for (int number = 2; taken.test(free); number++) {
             free = name + " " + number;
         }
         return free;
@@ -213,6 +289,6 @@ public record Drawing(List<Shape> shapes) {
     private Drawing changed(Consumer<List<Shape>> change) {
         List<Shape> list = new ArrayList<>(shapes);
         change.accept(list);
-        return new Drawing(list);
+        return new Drawing(list, lines);
     }
 }

@@ -7,9 +7,7 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Optional;
-import javafx.geometry.Bounds;
 import javafx.geometry.Point2D;
-import javafx.scene.Node;
 import javafx.scene.control.Label;
 import javafx.scene.input.KeyCode;
 import javafx.scene.input.MouseButton;
@@ -18,7 +16,6 @@ import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.seepledger.desktop.ledger.Arrangement;
-import org.seepledger.desktop.map.Camera;
 import org.seepledger.desktop.session.Opening;
 import org.seepledger.sketch.Drawing;
 import org.seepledger.sketch.Place;
@@ -34,11 +31,7 @@ class DrawingWindowTest {
 
     @BeforeEach
     void open() throws IOException {
-        try (var sample = Files.list(Path.of("sample-aquifers/valley"))) {
-            for (Path file : sample.toList()) {
-                Files.copy(file, folder.resolve(file.getFileName()));
-            }
-        }
+        ValleyCopy.into(folder);
         window = new OpenWindow(1600, 1000);
         openSet();
     }
@@ -55,14 +48,11 @@ class DrawingWindowTest {
     }
 
     private Point2D at(double mapX, double mapY) {
-        Node canvas = window.robot.lookup("#map-canvas").query();
-        Bounds bounds = canvas.localToScreen(canvas.getBoundsInLocal());
-        Camera camera = window.assembly().map().camera().get();
-        return new Point2D(bounds.getMinX() + camera.x(mapX), bounds.getMinY() + camera.y(mapY));
+        return window.onMap(mapX, mapY);
     }
 
     private void type(KeyCode... keys) {
-        window.robot.press(keys).release(keys);
+        window.type(keys);
     }
 
     private Drawing drawing() {

@@ -63,12 +63,14 @@ class IntakeWindowTest {
     }
 
     private void select(String title) {
-        ListView<?> list = find("#intake-items", ListView.class);
-        int row = list.getItems().stream().map(Object::toString).toList().stream()
-                .map(words -> words.contains(title))
-                .toList()
-                .indexOf(true);
-        window.robot.interact(() -> list.getSelectionModel().select(row));
+        window.robot.interact(() -> {
+            ListView<?> list = find("#intake-items", ListView.class);
+            for (int row = 0; row < list.getItems().size(); row++) {
+                if (list.getItems().get(row).toString().contains(title)) {
+                    list.getSelectionModel().select(row);
+                }
+            }
+        });
     }
 
     private void bringLooseValley() throws IOException {
@@ -84,7 +86,7 @@ class IntakeWindowTest {
     @Test
     void theValleysLooseFilesBecomeTheShippedFolder() throws IOException {
         bringLooseValley();
-        window.robot.clickOn(window.robot.lookup(".sl-finding").<Node>query());
+        window.robot.clickOn(".sl-finding");
         window.await(() -> find("#intake-vertical-share", TextField.class).isFocused());
         window.robot.write("0.1, 0.05, 0.1");
         window.robot.press(KeyCode.ENTER).release(KeyCode.ENTER);

@@ -1,14 +1,21 @@
 package org.seepledger.desktop;
 
+import java.io.IOException;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.concurrent.Callable;
 import java.util.concurrent.TimeUnit;
 import java.util.function.BooleanSupplier;
+import java.util.stream.Stream;
 import javafx.application.Platform;
+import javafx.geometry.Bounds;
+import javafx.geometry.Point2D;
+import javafx.scene.Node;
 import javafx.scene.control.ChoiceBox;
 import javafx.scene.input.KeyCode;
 import javafx.stage.Stage;
+import org.seepledger.desktop.map.Camera;
 import org.seepledger.desktop.port.GivenAnswers;
 import org.seepledger.desktop.task.BackgroundTasks;
 import org.seepledger.desktop.task.Tasks;
@@ -96,6 +103,28 @@ public final class OpenWindow implements AutoCloseable {
         }
         robot.type(KeyCode.ENTER);
         await(() -> value.equals(box.getValue()));
+    }
+
+    /** Where a place of the map is on the screen. */
+    Point2D onMap(double mapX, double mapY) {
+        Node canvas = robot.lookup("#map-canvas").query();
+        Bounds bounds = canvas.localToScreen(canvas.getBoundsInLocal());
+        Camera camera = assembly().map().camera().get();
+        return new Point2D(bounds.getMinX() + camera.x(mapX), bounds.getMinY() + camera.y(mapY));
+    }
+
+    /** Presses keys together, and lets them go. */
+    void type(KeyCode... keys) {
+        robot.press(keys).release(keys);
+    }
+
+    /** Copies a sample, to be changed. */
+    static void copy(Path sample, Path folder) throws IOException {
+        try (Stream<Path> files = Files.list(sample)) {
+            for (Path file : files.toList()) {
+                Files.copy(file, folder.resolve(file.getFileName()));
+            }
+        }
     }
 
     /** Lets the window come to rest. */

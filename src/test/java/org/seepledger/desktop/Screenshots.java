@@ -1,6 +1,5 @@
 package org.seepledger.desktop;
 
-import java.awt.image.BufferedImage;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -10,13 +9,14 @@ import javafx.scene.control.Label;
 import javafx.scene.control.ListView;
 import javafx.scene.image.Image;
 import javafx.scene.image.PixelFormat;
-import javax.imageio.ImageIO;
+import javafx.scene.input.KeyCode;
 import org.seepledger.desktop.theme.Theme;
 import org.seepledger.intake.LooseValley;
+import org.seepledger.job.MapQuantity;
 import org.seepledger.picture.SectionLine;
 import org.seepledger.sketch.Place;
 
-/** Writes pictures of each view, light and dark, in two sizes, into the folder given. */
+/** Writes small pictures of each view, light and dark, in two sizes, into the folder given. */
 public final class Screenshots {
 
     private Screenshots() {}
@@ -55,26 +55,56 @@ public final class Screenshots {
                 window.robot.clickOn("#folio-ledger").clickOn("#hand-over");
                 window.settle();
                 both(window, folder, "handover", suffix);
-                press(window, javafx.scene.input.KeyCode.ESCAPE);
+                press(window, KeyCode.ESCAPE);
                 window.robot.interact(() -> {
                     window.assembly().map().showPrism();
                     window.assembly().tray().flipCard();
                 });
-                press(window, javafx.scene.input.KeyCode.TAB);
+                press(window, KeyCode.TAB);
                 window.settle();
                 both(window, folder, "draw", suffix);
                 window.robot.interact(() -> window.assembly().tray().flipCard());
-                press(window, javafx.scene.input.KeyCode.F1);
+                window.robot.press(KeyCode.SHIFT, KeyCode.F6).release(KeyCode.F6, KeyCode.SHIFT);
+                window.robot.clickOn("#fold-below").clickOn("#legend-title");
+                window.settle();
+                both(window, folder, "wide", suffix);
+                window.robot.clickOn("#legend-title").clickOn("#fold-side").clickOn("#fold-below");
+                press(window, KeyCode.F1);
                 window.settle();
                 both(window, folder, "actions", suffix);
-                window.robot.press(javafx.scene.input.KeyCode.ESCAPE).release(javafx.scene.input.KeyCode.ESCAPE);
+                window.robot.press(KeyCode.ESCAPE).release(KeyCode.ESCAPE);
                 window.robot.interact(window.assembly().view()::showPreferences);
                 both(window, folder, "preferences", suffix);
                 window.robot.interact(window.assembly().view()::showNotices);
                 both(window, folder, "messages", suffix);
+                press(window, javafx.scene.input.KeyCode.ESCAPE);
+                solutes(window, folder, suffix);
             }
         }
         System.exit(0);
+    }
+
+    private static void solutes(OpenWindow window, Path folder, String suffix) throws IOException {
+        window.openSet(Path.of("sample-aquifers/depot"));
+        window.settle();
+        window.robot.interact(() -> {
+            window.assembly().session().solute().set("solvent");
+            window.assembly().session().interval().set(5);
+            window.assembly()
+                    .map()
+                    .values()
+                    .quantity()
+                    .set(window.assembly().map().values().quantities().stream()
+                            .filter(each -> each.kind() == MapQuantity.Kind.CONCENTRATION)
+                            .findFirst());
+        });
+        window.settle();
+        window.robot.clickOn("#solute-threshold").write("0.1 mg/L").type(javafx.scene.input.KeyCode.ENTER);
+        for (String page : new String[] {"ledger", "answers", "transects"}) {
+            window.robot.clickOn("#folio-" + page);
+            window.settle();
+            both(window, folder, "solute-" + page, suffix);
+        }
     }
 
     private static void section(OpenWindow window, Path folder, String suffix) throws IOException {
@@ -96,7 +126,7 @@ public final class Screenshots {
         window.settle();
     }
 
-    private static void press(OpenWindow window, javafx.scene.input.KeyCode key) {
+    private static void press(OpenWindow window, KeyCode key) {
         window.robot.press(key).release(key);
     }
 
@@ -137,8 +167,6 @@ public final class Screenshots {
         int height = (int) taken[0].getHeight();
         int[] pixels = new int[width * height];
         taken[0].getPixelReader().getPixels(0, 0, width, height, PixelFormat.getIntArgbInstance(), pixels, 0, width);
-        BufferedImage picture = new BufferedImage(width, height, BufferedImage.TYPE_INT_RGB);
-        picture.setRGB(0, 0, width, height, pixels, 0, width);
-        ImageIO.write(picture, "png", file.toFile());
+        IndexedPng.write(pixels, width, height, file);
     }
 }

@@ -4,20 +4,13 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import java.io.IOException;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import javafx.geometry.Bounds;
 import javafx.geometry.Point2D;
-import javafx.geometry.Pos;
 import javafx.scene.Node;
 import javafx.scene.control.Label;
-import javafx.scene.input.ClipboardContent;
 import javafx.scene.input.KeyCode;
-import javafx.scene.input.TransferMode;
-import javafx.scene.layout.Pane;
-import javafx.scene.layout.StackPane;
-import javafx.scene.shape.Rectangle;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -35,11 +28,7 @@ class ShapesWindowTest {
 
     @BeforeEach
     void open() throws IOException {
-        try (var sample = Files.list(Path.of("sample-aquifers/valley"))) {
-            for (Path file : sample.toList()) {
-                Files.copy(file, folder.resolve(file.getFileName()));
-            }
-        }
+        ValleyCopy.into(folder);
         window = new OpenWindow(1600, 1000);
         window.openSet(folder);
         window.await(() -> window.assembly().map().values().scale().get().isPresent());
@@ -156,21 +145,8 @@ class ShapesWindowTest {
                 window.assembly().session().set().get().orElseThrow().path().endsWith("terrace"));
     }
 
-    /** Drags a folder with the mouse from a mark that the test puts into the window's corner. */
-    private void drop(String pane, Path folder) {
-        Rectangle mark = new Rectangle(24, 24);
-        mark.setOnDragDetected(drag -> {
-            ClipboardContent content = new ClipboardContent();
-            content.putFiles(List.of(folder.toAbsolutePath().toFile()));
-            mark.startDragAndDrop(TransferMode.ANY).setContent(content);
-            drag.consume();
-        });
-        Pane root = (Pane) window.assembly().scene().getRoot();
-        window.robot.interact(() -> {
-            root.getChildren().add(mark);
-            StackPane.setAlignment(mark, Pos.BOTTOM_CENTER);
-        });
-        window.robot.drag(mark).dropTo(pane);
-        window.robot.interact(() -> root.getChildren().remove(mark));
+    private void drop(String pane, Path dropped) {
+        window.robot.interact(
+                () -> DraggedFolder.dropOn(window.robot.lookup(pane).query(), dropped));
     }
 }

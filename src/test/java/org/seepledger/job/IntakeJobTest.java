@@ -255,4 +255,27 @@ class IntakeJobTest {
         Path prisms = terrace.resolve("prisms.geojson");
         assertThat(budget(target, prisms)).isEqualTo(budget(terrace, prisms));
     }
+
+    @Test
+    void theDepotsTablesGiveItsWaterBudgetOnceGridTimesAndStorageAreTyped() throws IOException {
+        Path depot = Path.of("sample-aquifers/depot");
+        Path place = folder.resolve("tables");
+        Files.createDirectories(place);
+        for (String name : List.of("flow.csv", "head.csv", "ground.csv", "concentration.csv", "spill.csv")) {
+            Files.copy(depot.resolve(name), place.resolve(name));
+        }
+        Plan plan = Proposal.of(IntakeJob.look(List.of(place), Progress.NONE));
+        plan = LooseFolder.said(plan, Wishes.Topic.X, "0 10 25");
+        plan = LooseFolder.said(plan, Wishes.Topic.Y, "0, 10, 15");
+        plan = LooseFolder.said(plan, Wishes.Topic.TIMES, "monthly");
+        plan = LooseFolder.said(plan, Wishes.Topic.START, "2021-10-01");
+        plan = LooseFolder.said(plan, Wishes.Topic.SPECIFIC_STORAGE, "0.00008");
+        plan = LooseFolder.said(plan, Wishes.Topic.POROSITY, "0.28");
+        Composition composition = Composition.of(plan, false);
+        assertThat(composition.set().get("sources").toString()).contains("concentration={solvent=", "spill.csv");
+        assertThat(composition.set().get("solutes").toString()).contains("name=solvent", "name=product");
+        IntakeJob.write(composition, target, 2, Progress.NONE);
+        Path prisms = depot.resolve("prisms.geojson");
+        assertThat(budget(target, prisms)).isEqualTo(budget(depot, prisms));
+    }
 }

@@ -33,13 +33,13 @@ class LayerReadingTest {
     private static final Offset<Double> ROUNDING = within(1e-12);
 
     private static GridLayer read(Aquifer aquifer, Kind kind, int layer, int interval, int stride) {
-        MapQuantity quantity = new LayerReading(aquifer, Progress.NONE)
+        MapQuantity quantity = new LayerReading(aquifer, List.of(), Progress.NONE)
                 .quantities().stream()
                         .filter(each -> each.kind() == kind)
                         .findFirst()
                         .orElseThrow();
         Window all = aquifer.grid().window();
-        return new LayerReading(aquifer, Progress.NONE).layer(quantity, layer, interval, all, stride);
+        return new LayerReading(aquifer, List.of(), Progress.NONE).layer(quantity, layer, interval, all, stride);
     }
 
     private static GriddedValues constant(double value) {
@@ -108,12 +108,12 @@ class LayerReadingTest {
         Grid turned = new Grid(Axis.even(0, 1, 4), Axis.even(0, 1, 4), 30, 1);
         Window all = turned.window();
         Aquifer alongGrid = AquiferDraft.on(turned).flow(flux(2, 0, 0, false)).done();
-        FluxField arrows = new LayerReading(alongGrid, Progress.NONE).flux(0, 0, all, 2);
+        FluxField arrows = new LayerReading(alongGrid, List.of(), Progress.NONE).flux(0, 0, all, 2);
         assertThat(arrows.east().values()).hasSize(4);
         assertThat(arrows.east().at(1, 1)).isCloseTo(Math.sqrt(3), ROUNDING);
         assertThat(arrows.north().at(1, 1)).isCloseTo(1, ROUNDING);
         Aquifer alongMap = AquiferDraft.on(turned).flow(flux(2, 0, 0, true)).done();
-        arrows = new LayerReading(alongMap, Progress.NONE).flux(0, 0, all, 2);
+        arrows = new LayerReading(alongMap, List.of(), Progress.NONE).flux(0, 0, all, 2);
         assertThat(arrows.east().at(0, 0)).isEqualTo(2);
         assertThat(arrows.north().at(0, 0)).isEqualTo(0);
     }
@@ -130,7 +130,7 @@ class LayerReadingTest {
         assertThat(read.columns()).isEqualTo(3);
         assertThat(read.at(0, 0)).isCloseTo(5 / 3.0, ROUNDING);
         assertThat(read.at(1, 2)).isCloseTo(3, ROUNDING);
-        List<MapQuantity> quantities = new LayerReading(aquifer, Progress.NONE).quantities();
+        List<MapQuantity> quantities = new LayerReading(aquifer, List.of(), Progress.NONE).quantities();
         assertThat(quantities)
                 .extracting(MapQuantity::label)
                 .containsExactly("flux magnitude", "rain", "ditch", "thickness", "saturated thickness", "imbalance");
@@ -173,7 +173,7 @@ class LayerReadingTest {
             @Override
             public void step() {}
         };
-        LayerReading reading = new LayerReading(AquiferDraft.on(GRID).done(), stopping);
+        LayerReading reading = new LayerReading(AquiferDraft.on(GRID).done(), List.of(), stopping);
         MapQuantity quantity = reading.quantities().get(0);
         assertThatThrownBy(() -> reading.layer(quantity, 0, 0, GRID.window(), 1))
                 .isInstanceOf(Cancelled.class);

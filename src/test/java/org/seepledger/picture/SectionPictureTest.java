@@ -2,12 +2,13 @@ package org.seepledger.picture;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
+import static org.seepledger.picture.ProfileTest.line;
+import static org.seepledger.picture.ProfileTest.profile;
 
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Random;
-import java.util.stream.IntStream;
 import net.jqwik.api.ForAll;
 import net.jqwik.api.Property;
 import org.junit.jupiter.api.Test;
@@ -32,16 +33,6 @@ class SectionPictureTest {
         return body.slabs().stream()
                 .mapToDouble(slab -> slab.to() - slab.from())
                 .sum();
-    }
-
-    private static SectionLine line(double... xy) {
-        return new SectionLine(IntStream.range(0, xy.length / 2)
-                .mapToObj(i -> new Place(xy[2 * i], xy[2 * i + 1]))
-                .toList());
-    }
-
-    private static Profile profile(SectionLine line, Aquifer aquifer) {
-        return Profile.along(line, aquifer, 0, 1, Optional.empty(), Progress.NONE);
     }
 
     private static Body body(SectionLine line, Prism prism) {
@@ -202,7 +193,7 @@ class SectionPictureTest {
             (int) (frame.y(85) - frame.box().y()),
             (int) (frame.y(75) - frame.box().y())
         };
-        assertThat(image.argb()[rows[0] * image.columns() + column]).isEqualTo(scale.argb(0, 1));
+        assertThat(image.argb()[rows[0] * image.columns() + column]).isZero();
         assertThat(image.argb()[rows[1] * image.columns() + column]).isZero();
         assertThat(image.argb()[rows[2] * image.columns() + column]).isEqualTo(scale.argb(2, 1));
         assertThat(Scene.flat(picture.marks())
@@ -210,6 +201,29 @@ class SectionPictureTest {
                         .flatMap(mark -> ((Mark.Area) mark).fill().stream()))
                 .anyMatch(fill -> fill.texture() == Mark.Texture.DOTS);
         assertThat(Scene.texts(picture)).extracting(Mark.Text::words).contains("dry", "colour: index, m");
+        assertThat(Scene.texts(SectionPicture.of(section, 720, 400)))
+                .extracting(Mark.Text::words)
+                .contains("index, m")
+                .doesNotContain("colour: index, m");
+    }
+
+    @Test
+    void coloursReachUpToTheWaterLevelWhereItCanLie() {
+        Aquifer aquifer = Scene.aquifer();
+        Profile profile = Profile.along(
+                line(1000, 2100, 1300, 2100),
+                aquifer,
+                0,
+                1,
+                Optional.of((layer, window) -> new double[window.size()]),
+                Progress.NONE);
+        Section section = ProfileTest.section(profile, aquifer, List.of())
+                .in(Optional.of(new Section.Colours(new ValueScale(Ramp.DEPTH, 0, 1), "x")));
+        SectionFrame frame = SectionFrame.fitting(profile, new Box(0, 0, 100, 200));
+        Mark.Image image = SectionColours.of(section, section.colours().orElseThrow(), frame);
+        assertThat(image.argb()[(int) (frame.y(95) - 1.5) * 100 + 50]).isZero();
+        assertThat(image.argb()[(int) (frame.y(95) + 1.5) * 100 + 50]).isNotZero();
+        assertThat(image.argb()[(int) (frame.y(70) - 1.5) * 100 + 50]).isNotZero();
     }
 
     @Test

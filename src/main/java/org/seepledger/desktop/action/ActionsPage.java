@@ -33,7 +33,7 @@ public final class ActionsPage extends VBox {
         this.close = close;
         setId("actions-page");
         getStyleClass().add("sl-sheet");
-        setMaxSize(560, 640);
+        setMaxSize(620, 640);
         sought.setId("actions-sought");
         sought.setPromptText(Words.of("actions.sought"));
         sought.textProperty().addListener((text, before, now) -> fill());
@@ -83,6 +83,11 @@ public final class ActionsPage extends VBox {
     /** Words on the left, shortcut on the right. */
     private static final class ActionCell extends ListCell<Action> {
 
+        /** As wide as the list and no wider, so that keys are never cut off. */
+        ActionCell() {
+            setPrefWidth(0);
+        }
+
         @Override
         protected void updateItem(Action action, boolean empty) {
             super.updateItem(action, empty);
@@ -97,6 +102,7 @@ public final class ActionsPage extends VBox {
             HBox.setHgrow(gap, Priority.ALWAYS);
             Label keys = new Label(KeyCombination.valueOf(action.keys()).getDisplayText());
             keys.getStyleClass().add("sl-key");
+            keys.setMinWidth(USE_PREF_SIZE);
             HBox row = new HBox(10, group, new Label(action.words()), gap, keys);
             row.setAlignment(Pos.CENTER_LEFT);
             row.setDisable(!action.possible().getAsBoolean());

@@ -16,7 +16,7 @@ import org.seepledger.ledger.Period;
 import org.seepledger.prism.Prism;
 import org.seepledger.report.Term;
 
-/** Tells map and section what flows through the selected prism's faces in the interval looked at. */
+/** Tells map and section what water flows through the selected prism's faces in the interval looked at, where no solute is. */
 public final class FaceFeed {
 
     private final Session session;
@@ -42,10 +42,14 @@ public final class FaceFeed {
         live.now().addListener((now, before, after) -> tell());
         session.selected().addListener((selected, before, after) -> tell());
         session.interval().addListener((interval, before, after) -> tell());
+        session.solute().addListener((solute, before, after) -> tell());
         reading.rateUnit().addListener((unit, before, after) -> tell());
     }
 
     private void tell() {
+        if (!session.solute().get().isEmpty()) {
+            return;
+        }
         Optional<OpenSet> set = session.set().get().filter(open -> !hasFailed());
         Optional<Prism> prism = session.selectedPrism();
         session.faceFlows()

@@ -8,6 +8,7 @@ import javafx.beans.property.ReadOnlyIntegerWrapper;
 import javafx.beans.property.ReadOnlyLongProperty;
 import javafx.beans.property.ReadOnlyLongWrapper;
 import javafx.beans.property.ReadOnlyObjectProperty;
+import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.beans.property.ReadOnlyStringProperty;
 import javafx.beans.property.ReadOnlyStringWrapper;
 import org.seepledger.balance.Periods;
@@ -16,12 +17,18 @@ import org.seepledger.desktop.budget.PeriodWords;
 import org.seepledger.desktop.budget.Reading;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
+import org.seepledger.desktop.solute.LivePlume;
+import org.seepledger.desktop.solute.MassReading;
+import org.seepledger.desktop.solute.SoluteAnswersModel;
 import org.seepledger.desktop.task.PaneState;
+import org.seepledger.io.result.MassUnits;
 import org.seepledger.job.RecordBudget;
 import org.seepledger.ledger.Ledger;
 import org.seepledger.ledger.Period;
 import org.seepledger.picture.BudgetSeries;
+import org.seepledger.picture.MassCurve;
 import org.seepledger.picture.Picture;
+import org.seepledger.report.Wording;
 
 /** The selected prism's budgets through time, and the interval looked at among them. */
 public final class ChartModel {
@@ -29,26 +36,47 @@ public final class ChartModel {
     private final Session session;
     private final LiveBudget live;
     private final Reading reading;
+    private final LivePlume plumes;
+    private final MassReading masses;
+    private final SoluteAnswersModel answers;
     private final ReadOnlyLongWrapper changes = new ReadOnlyLongWrapper();
     private final ReadOnlyIntegerWrapper last = new ReadOnlyIntegerWrapper();
+    private final ReadOnlyObjectWrapper<PaneState> state = new ReadOnlyObjectWrapper<>(PaneState.READY);
     private final ReadOnlyStringWrapper when = new ReadOnlyStringWrapper("");
 
     /**
      * Makes the model.
      *
      * @param session what the window looks at
-     * @param live the budgets
+     * @param live the water's budgets
      * @param reading how figures are read
+     * @param plumes the solutes' budgets
+     * @param masses how masses are read
+     * @param answers tells the trend of masses
      */
-    public ChartModel(Session session, LiveBudget live, Reading reading) {
+    public ChartModel(
+            Session session,
+            LiveBudget live,
+            Reading reading,
+            LivePlume plumes,
+            MassReading masses,
+            SoluteAnswersModel answers) {
         this.session = session;
         this.live = live;
         this.reading = reading;
+        this.plumes = plumes;
+        this.masses = masses;
+        this.answers = answers;
         session.set().addListener((set, before, after) -> change());
         live.whole().addListener((whole, before, after) -> change());
         session.selected().addListener((selected, before, after) -> change());
         session.interval().addListener((interval, before, after) -> change());
         reading.changes().addListener((changed, before, after) -> change());
+        answers.changes().addListener((changed, before, after) -> change());
+        session.solute().addListener((solute, before, after) -> showState());
+        live.record().addListener((record, before, after) -> showState());
+        plumes.recordState().addListener((record, before, after) -> showState());
+        showState();
         change();
     }
 
@@ -74,7 +102,20 @@ public final class ChartModel {
 
     /** {@return which state the pane is in} */
     public ReadOnlyObjectProperty<PaneState> state() {
-        return live.record();
+        return state.getReadOnlyProperty();
+    }
+
+    private void showState() {
+        state.set((ofSolute() ? plumes.recordState() : live.record()).get());
+    }
+
+    private boolean ofSolute() {
+        return !session.solute().get().isEmpty();
+    }
+
+    /** {@return what the masses shown say of a trend; empty for water} */
+    public String trend() {
+        return ofSolute() ? answers.trend() : "";
     }
 
     /** {@return the interval looked at, from 0} */
@@ -108,6 +149,45 @@ public final class ChartModel {
     }
 
     /**
+     * {@return what is drawn: gains and losses of water, or masses of the solute looked at}
+     *
+     * @param width in logical pixels
+     * @param height in logical pixels
+     */
+    Optional<Drawn> drawn(double width, double height) {
+        return ofSolute()
+                ? masses(width, height)
+                        .map(curve -> new Drawn(
+                                written(curve.picture()),
+                                x -> curve.intervalAt(x).ifPresent(this::look)))
+                : chart(width, height)
+                        .map(series -> new Drawn(
+                                picture(series), x -> series.periodAt(x).ifPresent(this::lookAtPeriod)));
+    }
+
+    /**
+     * {@return what the selected prism holds of the solute looked at through time, if the record is known}
+     *
+     * @param width in logical pixels
+     * @param height in logical pixels
+     */
+    public Optional<MassCurve> masses(double width, double height) {
+        return session.set()
+                .get()
+                .flatMap(set -> plumes.shown().map(shown -> {
+                    MassUnits units = masses.inUse(set);
+                    return MassCurve.of(
+                            shown.plume(),
+                            set.aquifer().times(),
+                            Wording.raised(units.mass()),
+                            units.massFactor(),
+                            session.interval().get(),
+                            Math.max(300, width),
+                            height);
+                }));
+    }
+
+    /**
      * {@return the chart, if the record is known}
      *
      * @param width in logical pixels
@@ -135,7 +215,11 @@ public final class ChartModel {
      * @param chart the chart
      */
     public Picture picture(BudgetSeries chart) {
-        return chart.picture().written(session.numbers().get()::label);
+        return written(chart.picture());
+    }
+
+    private Picture written(Picture picture) {
+        return picture.written(session.numbers().get()::label);
     }
 
     private Optional<Ledger> ledger() {

@@ -15,18 +15,19 @@ import org.seepledger.desktop.paint.PictureView;
 import org.seepledger.desktop.pane.StatePane;
 import org.seepledger.desktop.theme.Theme;
 import org.seepledger.desktop.words.Words;
-import org.seepledger.picture.BudgetSeries;
 import org.seepledger.picture.Picture;
 
 /** The chart, and for above it the slider of the interval looked at; a click or drag on the chart moves it too. */
 public final class ChartView extends BorderPane {
 
-    private static final double LEAST_HEIGHT = 196;
+    private static final double LEAST_HEIGHT = 158;
+    private static final double TREND_WIDTH = 340;
 
     private final ChartModel model;
     private final PictureView picture;
     private final Slider slider = new Slider();
-    private Optional<BudgetSeries> drawn = Optional.empty();
+    private final Label trend = new Label();
+    private Optional<Drawn> drawn = Optional.empty();
 
     /**
      * Builds the pane.
@@ -49,7 +50,29 @@ public final class ChartView extends BorderPane {
         scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
         setMinHeight(LEAST_HEIGHT);
         setCenter(new StatePane(scroll, model.state()).withAction(Words.of("budget.draw"), model::draw));
-        model.changes().addListener((changes, before, after) -> picture.redraw());
+        setRight(trend());
+        model.changes().addListener((changes, before, after) -> show());
+        show();
+    }
+
+    private void show() {
+        picture.redraw();
+        trend.setText(model.trend());
+    }
+
+    /** What the masses say of a trend, beside them. */
+    private ScrollPane trend() {
+        trend.setId("chart-trend");
+        trend.setWrapText(true);
+        trend.setMinHeight(USE_PREF_SIZE);
+        trend.getStyleClass().addAll("sl-small", "sl-choices");
+        ScrollPane words = new ScrollPane(trend);
+        words.setFitToWidth(true);
+        words.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
+        words.setPrefWidth(TREND_WIDTH);
+        words.visibleProperty().bind(trend.textProperty().isNotEmpty());
+        words.managedProperty().bind(words.visibleProperty());
+        return words;
     }
 
     /** {@return the slider of the interval looked at, to be put above the chart} */
@@ -77,11 +100,11 @@ public final class ChartView extends BorderPane {
     }
 
     private Optional<Picture> draw(double width, double height) {
-        drawn = model.chart(width, height);
-        return drawn.map(model::picture);
+        drawn = model.drawn(width, height);
+        return drawn.map(Drawn::picture);
     }
 
     private void look(MouseEvent mouse) {
-        drawn.ifPresent(series -> series.periodAt(mouse.getX()).ifPresent(model::lookAtPeriod));
+        drawn.ifPresent(chart -> chart.look().accept(mouse.getX()));
     }
 }

@@ -47,8 +47,14 @@ public record DraftActions(DraftModel model, DraftHand hand, DraftFiles files, T
         nudges(all, map);
         all.add(action(FILE, "action.save", "Shortcut+S", files::save));
         all.add(action(FILE, "action.export", "Shortcut+Shift+S", files::export));
+        all.add(ofTransects("action.transects.export", "Shortcut+Shift+L", files::exportTransects));
+        all.add(ofTransects("action.transects.import", "Shortcut+L", files::importTransects));
         all.add(action(FILE, "action.import", "Shortcut+I", files::importFile));
         return all;
+    }
+
+    private Action ofTransects(String name, String keys, Runnable run) {
+        return new Action(FILE, name, keys, model::hasSolutes, told(run));
     }
 
     private void nudges(List<Action> all, MapModel map) {

@@ -19,6 +19,8 @@ import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.words.FaultWords;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.job.DrawingFile;
+import org.seepledger.prism.Transect;
+import org.seepledger.sketch.ControlLine;
 import org.seepledger.sketch.Drawing;
 import org.seepledger.sketch.Limit;
 import org.seepledger.sketch.Shape;
@@ -90,10 +92,13 @@ public final class DraftFiles {
                 progress -> {
                     EntryGuard.enter();
                     Path aside = set.path().resolve(Opening.UNSAVED);
+                    Path linesAside = set.path().resolve(Opening.UNSAVED_TRANSECTS);
                     if (unsaved) {
                         set.workbench().write(aside, drawing);
+                        writeLines(set, linesAside, drawing);
                     } else {
                         Files.deleteIfExists(aside);
+                        Files.deleteIfExists(linesAside);
                     }
                     return drawing;
                 },
@@ -125,7 +130,9 @@ public final class DraftFiles {
                     EntryGuard.enter();
                     set.workbench().write(file, drawing);
                     if (own) {
+                        writeLines(set, set.path().resolve(Opening.TRANSECTS), drawing);
                         Files.deleteIfExists(set.path().resolve(Opening.UNSAVED));
+                        Files.deleteIfExists(set.path().resolve(Opening.UNSAVED_TRANSECTS));
                     }
                     return file;
                 },
@@ -140,6 +147,65 @@ public final class DraftFiles {
                     done.accept(written);
                 },
                 fault -> model.session().notices().refuse(FaultWords.of(fault)));
+    }
+
+    /** Where there are none and no file has any, there is nothing to write. */
+    private static void writeLines(OpenSet set, Path file, Drawing drawing) {
+        if (!set.solutes().isEmpty()
+                && (!drawing.lines().isEmpty()
+                        || Files.exists(file)
+                        || Files.exists(set.path().resolve(Opening.TRANSECTS)))) {
+            set.workbench().solutes().write(file, transects(drawing));
+        }
+    }
+
+    private static List<Transect> transects(Drawing drawing) {
+        return drawing.lines().stream().map(ControlLine::transect).toList();
+    }
+
+    /** Saves the transects in a file that is asked for. */
+    public void exportTransects() {
+        set().ifPresent(set -> dialogs.fileToWrite(
+                        Words.of("transect.export"), GEOJSON, set.path().resolve(Opening.TRANSECTS))
+                .ifPresent(file -> {
+                    Drawing drawing = model.settled();
+                    files.run(
+                            progress -> {
+                                EntryGuard.enter();
+                                set.workbench().solutes().write(file, transects(drawing));
+                                return file;
+                            },
+                            written -> model.session()
+                                    .status()
+                                    .set(Words.of(
+                                            "transect.saved", drawing.lines().size(), written)),
+                            fault -> model.session().notices().refuse(FaultWords.of(fault)));
+                }));
+    }
+
+    /** Adds the transects of a file that is asked for; a name that is taken gets a number. */
+    public void importTransects() {
+        set().ifPresent(set -> dialogs.fileToRead(Words.of("transect.import"), GEOJSON)
+                .ifPresent(file -> files.run(
+                        progress -> {
+                            EntryGuard.enter();
+                            return set.workbench().solutes().transects(file);
+                        },
+                        this::add,
+                        fault -> model.session().notices().refuse(FaultWords.of(fault)))));
+    }
+
+    private void add(List<Transect> transects) {
+        boolean added = model.step("step.transect.import", before -> {
+            Drawing drawing = before;
+            for (Transect transect : transects) {
+                drawing = drawing.with(ControlLine.of(transect));
+            }
+            return drawing;
+        });
+        if (added) {
+            model.session().notices().done(Words.of("transect.imported", transects.size()));
+        }
     }
 
     /** Adds the prisms of a file that is asked for; a name that is taken gets a number. */
@@ -201,6 +267,7 @@ public final class DraftFiles {
         files.run(
                 progress -> {
                     EntryGuard.enter();
+                    Files.deleteIfExists(set.path().resolve(Opening.UNSAVED_TRANSECTS));
                     return Files.deleteIfExists(set.path().resolve(Opening.UNSAVED));
                 },
                 gone -> go.run(),

@@ -23,6 +23,8 @@ public final class DraftHand implements Hand {
     private final SelectHand select;
     private final StrokeHand stroke;
     private final SpanHand span;
+    private final LineHand line;
+    private Optional<Touch> last = Optional.empty();
 
     /**
      * Makes the hand.
@@ -34,6 +36,7 @@ public final class DraftHand implements Hand {
         this.select = new SelectHand(model, pick, snapper);
         this.stroke = new StrokeHand(model, snapper);
         this.span = new SpanHand(model, snapper);
+        this.line = new LineHand(model, snapper);
         model.tool().addListener((tool, before, after) -> {
             stroke.cancel();
             span.cancel();
@@ -50,13 +53,19 @@ public final class DraftHand implements Hand {
     }
 
     private boolean isStroke() {
-        return tool() == Tool.POLYGON || tool() == Tool.ISLAND || tool() == Tool.SPLIT || tool() == Tool.SECTION;
+        return tool() == Tool.POLYGON
+                || tool() == Tool.ISLAND
+                || tool() == Tool.SPLIT
+                || tool() == Tool.SECTION
+                || tool() == Tool.TRANSECT;
     }
 
     @Override
     public boolean press(Touch touch) {
+        begin(touch);
         if (tool() == Tool.SELECT) {
-            return select.press(touch);
+            line.letGo();
+            return !select.isOnVertex(touch) && line.press(touch) || select.press(touch);
         }
         if (tool() == Tool.MERGE) {
             merge(touch);
@@ -68,13 +77,18 @@ public final class DraftHand implements Hand {
         return true;
     }
 
+    private void begin(Touch touch) {
+        model.forgetRefusal();
+        last = Optional.of(touch);
+    }
+
     private void merge(Touch touch) {
         Place pointer = new Place(touch.x(), touch.y());
         Optional<String> other = Hit.at(model.drawing(), pointer, Nearness.ofPixel(touch.pixel()), Optional.empty())
                 .map(Hit::shape);
         Optional<String> one = model.selected().map(Shape::name);
         if (other.isEmpty() || other.equals(one)) {
-            model.session().status().set(Words.of("merge.other"));
+            model.refuse(Words.of("merge.other"));
             return;
         }
         if (model.step("step.merge", drawing -> drawing.merge(one.orElseThrow(), other.get(), model.near()))) {
@@ -84,7 +98,10 @@ public final class DraftHand implements Hand {
 
     @Override
     public void drag(Touch touch) {
-        if (tool() == Tool.SELECT) {
+        last = Optional.of(touch);
+        if (line.isHeld()) {
+            line.drag(touch);
+        } else if (tool() == Tool.SELECT) {
             select.drag(touch);
         } else if (isSpan()) {
             span.drag(touch);
@@ -95,7 +112,9 @@ public final class DraftHand implements Hand {
 
     @Override
     public void release(Touch touch) {
-        if (tool() == Tool.SELECT) {
+        if (line.isHeld()) {
+            line.release();
+        } else if (tool() == Tool.SELECT) {
             select.release();
         } else if (isSpan()) {
             span.release(touch);
@@ -106,6 +125,7 @@ public final class DraftHand implements Hand {
     public void hover(Touch touch) {
         if (tool() == Tool.SELECT) {
             select.hover(touch);
+            line.hover(touch);
         } else if (isSpan()) {
             span.hover(touch);
         } else if (isStroke()) {
@@ -115,6 +135,7 @@ public final class DraftHand implements Hand {
 
     @Override
     public void doubleClick(Touch touch) {
+        begin(touch);
         if (tool() == Tool.SELECT) {
             select.doubleClick(touch);
         } else if (isStroke()) {
@@ -125,7 +146,7 @@ public final class DraftHand implements Hand {
     @Override
     public Aim aim() {
         return switch (tool()) {
-            case SELECT -> select.aim();
+            case SELECT -> line.isOver() ? Aim.MOVE : select.aim();
             case MERGE -> Aim.CHOOSE;
             default -> Aim.DRAW;
         };
@@ -134,6 +155,7 @@ public final class DraftHand implements Hand {
     @Override
     public List<Mark> marks(Camera camera) {
         DraftMarks marks = new DraftMarks(camera);
+        marks.lines(model.drawing().lines(), model.session().transect().get(), line.vertex());
         model.selected().ifPresent(shape -> marks.shape(shape, pick));
         boolean closes = tool() == Tool.POLYGON || tool() == Tool.ISLAND;
         if (isStroke()) {
@@ -143,6 +165,7 @@ public final class DraftHand implements Hand {
             marks.stroke(span.places(), Optional.empty(), true);
         }
         snapper.snap().ifPresent(marks::snap);
+        last.ifPresent(touch -> marks.refusal(model.refusal().get(), new Place(touch.x(), touch.y())));
         return marks.list();
     }
 
@@ -157,7 +180,7 @@ public final class DraftHand implements Hand {
     public void delete() {
         if (isStroke()) {
             stroke.back();
-        } else if (tool() == Tool.SELECT) {
+        } else if (tool() == Tool.SELECT && !line.delete()) {
             select.delete();
         }
     }
@@ -165,6 +188,7 @@ public final class DraftHand implements Hand {
     /** Gives up what is going on: everything is again as it was, to the last bit. */
     public void cancel() {
         if (tool() == Tool.SELECT) {
+            line.cancel();
             select.cancel();
         } else {
             model.choose(Tool.SELECT);
@@ -188,7 +212,7 @@ public final class DraftHand implements Hand {
      * @return false if none is chosen
      */
     public boolean nudge(double dx, double dy) {
-        return tool() == Tool.SELECT && select.nudge(dx, dy);
+        return tool() == Tool.SELECT && (line.nudge(dx, dy) || select.nudge(dx, dy));
     }
 
     /**
@@ -198,10 +222,11 @@ public final class DraftHand implements Hand {
      * @return whether it was taken; else the status line says why not
      */
     public boolean type(String text) {
+        last = Optional.empty();
         try {
             return tool() == Tool.CIRCLE ? radius(text) : place(Place.typed(text));
         } catch (Refusal refusal) {
-            model.session().status().set(refusal.getMessage());
+            model.refuse(refusal.getMessage());
             return false;
         }
     }
@@ -220,8 +245,15 @@ public final class DraftHand implements Hand {
     }
 
     private boolean place(Place place) {
+        boolean ofTransect = tool() == Tool.TRANSECT || line.vertex().isPresent();
+        if (ofTransect && !model.onGrid(place).equals(place)) {
+            throw new Refusal(Words.of("transect.off"));
+        }
         if (isStroke()) {
             stroke.add(place);
+            return true;
+        }
+        if (line.put(place)) {
             return true;
         }
         Place from = select.vertexPlace().orElseThrow(() -> new Refusal(Words.of("type.vertex")));
@@ -234,8 +266,9 @@ public final class DraftHand implements Hand {
      * @param name its name; empty to let them count under their own
      */
     public void nameBoundary(String name) {
+        last = Optional.empty();
         if (pick.sides().isEmpty()) {
-            model.session().status().set(Words.of("boundary.sides"));
+            model.refuse(Words.of("boundary.sides"));
             return;
         }
         Optional<String> boundary = Optional.of(name.strip()).filter(given -> !given.isEmpty());

@@ -6,8 +6,10 @@ import java.util.Optional;
 import org.seepledger.desktop.map.Camera;
 import org.seepledger.picture.Ink;
 import org.seepledger.picture.Mark;
+import org.seepledger.sketch.ControlLine;
 import org.seepledger.sketch.Crossings;
 import org.seepledger.sketch.Hit;
+import org.seepledger.sketch.LineHit;
 import org.seepledger.sketch.Outline;
 import org.seepledger.sketch.Place;
 import org.seepledger.sketch.Shape;
@@ -24,6 +26,11 @@ final class DraftMarks {
     private static final double ROOMY = 22;
 
     private static final double GLYPH = 7;
+    private static final double NEAR = 14;
+    private static final double LETTERS = 12;
+    private static final int WIDEST = 42;
+
+    private static final double ARROW = 14;
 
     private final Camera camera;
     private final List<Mark> marks = new ArrayList<>();
@@ -34,6 +41,32 @@ final class DraftMarks {
 
     List<Mark> list() {
         return marks;
+    }
+
+    /** Why something was refused, where it was tried. */
+    void refusal(String why, Place place) {
+        double y = y(place) - NEAR;
+        for (String line : lines(why)) {
+            marks.add(Mark.Text.of(x(place) + NEAR, y, line, LETTERS, Mark.Anchor.START)
+                    .in(Ink.Token.LOSS)
+                    .haloed()
+                    .strong());
+            y += 1.3 * LETTERS;
+        }
+    }
+
+    private static List<String> lines(String why) {
+        List<String> lines = new ArrayList<>();
+        StringBuilder line = new StringBuilder();
+        for (String word : why.split(" ")) {
+            if (line.length() + word.length() > WIDEST && !line.isEmpty()) {
+                lines.add(line.toString().strip());
+                line.setLength(0);
+            }
+            line.append(word).append(' ');
+        }
+        lines.add(line.toString().strip());
+        return lines;
     }
 
     void shape(Shape shape, Pick pick) {
@@ -104,6 +137,56 @@ final class DraftMarks {
         if (places.size() < 40) {
             places.forEach(place -> vertex(place, false));
         }
+    }
+
+    /** Transects, the chosen one with its vertices, each with an arrow to where forward is. */
+    void lines(List<ControlLine> lines, String selected, Optional<LineHit> vertex) {
+        for (ControlLine line : lines) {
+            boolean isSelected = line.name().equals(selected);
+            List<Place> places = line.places();
+            double[] xy = new double[2 * places.size()];
+            for (int i = 0; i < places.size(); i++) {
+                xy[2 * i] = x(places.get(i));
+                xy[2 * i + 1] = y(places.get(i));
+            }
+            haloed(xy, Ink.Token.TEXT, isSelected ? 2.6 : 1.6);
+            for (int i = 0; i + 3 < xy.length; i += 2) {
+                forward(xy[i], xy[i + 1], xy[i + 2], xy[i + 3]);
+            }
+            marks.add(Mark.Text.of(xy[0] + 7, xy[1] - 7, line.name(), 12, Mark.Anchor.START)
+                    .haloed());
+            for (int i = 0; i < places.size() && isSelected; i++) {
+                int place = i;
+                vertex(
+                        places.get(i),
+                        vertex.filter(hit -> hit.index() == place && hit.line().equals(selected))
+                                .isPresent());
+            }
+        }
+    }
+
+    /** To the right of a segment, from its middle. */
+    private void forward(double fromX, double fromY, double toX, double toY) {
+        double length = Math.hypot(toX - fromX, toY - fromY);
+        if (length < 3 * ARROW) {
+            return;
+        }
+        double rightX = -(toY - fromY) / length;
+        double rightY = (toX - fromX) / length;
+        double x = (fromX + toX) / 2;
+        double y = (fromY + toY) / 2;
+        double tipX = x + ARROW * rightX;
+        double tipY = y + ARROW * rightY;
+        haloed(new double[] {x, y, tipX, tipY}, Ink.Token.TEXT, 1.6);
+        double[] head = {
+            tipX - 5 * rightX - 4 * rightY,
+            tipY - 5 * rightY + 4 * rightX,
+            tipX,
+            tipY,
+            tipX - 5 * rightX + 4 * rightY,
+            tipY - 5 * rightY - 4 * rightX
+        };
+        haloed(head, Ink.Token.TEXT, 1.6);
     }
 
     /** A glyph for each kind of target: ring, square, slanted cross, upright cross. */

@@ -8,6 +8,8 @@ import java.util.function.UnaryOperator;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyLongProperty;
 import javafx.beans.property.ReadOnlyLongWrapper;
+import javafx.beans.property.ReadOnlyStringProperty;
+import javafx.beans.property.ReadOnlyStringWrapper;
 import javafx.beans.property.SimpleObjectProperty;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.aquifer.GriddedValues;
@@ -15,10 +17,13 @@ import org.seepledger.aquifer.Layer;
 import org.seepledger.desktop.session.Drafting;
 import org.seepledger.desktop.session.DrawnShapes;
 import org.seepledger.desktop.session.Session;
+import org.seepledger.desktop.session.Transects;
 import org.seepledger.desktop.words.Words;
+import org.seepledger.sketch.ControlLine;
 import org.seepledger.sketch.Drawing;
 import org.seepledger.sketch.History;
 import org.seepledger.sketch.Limit;
+import org.seepledger.sketch.Place;
 import org.seepledger.sketch.Refusal;
 import org.seepledger.sketch.Shape;
 
@@ -28,6 +33,7 @@ public final class DraftModel implements Drafting {
     private final Session session;
     private final ObjectProperty<Tool> tool = new SimpleObjectProperty<>(Tool.SELECT);
     private final ReadOnlyLongWrapper version = new ReadOnlyLongWrapper();
+    private final ReadOnlyStringWrapper refusal = new ReadOnlyStringWrapper("");
     private History history = new History(Drawing.EMPTY);
     private Map<Limit.Surface, GriddedValues> surfaces = Map.of();
     private Drawing saved = Drawing.EMPTY;
@@ -39,10 +45,14 @@ public final class DraftModel implements Drafting {
      */
     public DraftModel(Session session) {
         this.session = session;
+        session.transectName().addListener((name, before, after) -> after.ifPresent(this::rename));
         session.demand().addListener((demand, before, after) -> {
             if (after == Session.Demand.DRAW_PRISM || after == Session.Demand.DRAW_SECTION) {
                 session.demand().set(Session.Demand.NONE);
                 choose(after == Session.Demand.DRAW_PRISM ? Tool.POLYGON : Tool.SECTION);
+            } else if (after == Session.Demand.DRAW_TRANSECT) {
+                session.demand().set(Session.Demand.NONE);
+                choose(Tool.TRANSECT);
             }
         });
     }
@@ -90,11 +100,37 @@ public final class DraftModel implements Drafting {
                                         Math.max(1, layers.size()), (limit, lid) -> surface(layers, limit, lid)))
                                 .toList(),
                         settled));
+        publishLines(settled);
         tellShapes();
         if (history.current().find(session.selected().get()).isEmpty()) {
             session.selected().set("");
         }
         version.set(version.get() + 1);
+    }
+
+    private void publishLines(boolean settled) {
+        session.transects().set(new Transects(drawing().lines(), settled));
+        if (selectedLine().isEmpty()) {
+            session.transect()
+                    .set(drawing().lines().stream()
+                            .map(ControlLine::name)
+                            .findFirst()
+                            .orElse(""));
+        }
+    }
+
+    private void rename(String name) {
+        session.transectName().set(Optional.empty());
+        selectedLine().filter(line -> !line.name().equals(name)).ifPresent(line -> {
+            if (step("step.transect.name", drawing -> drawing.editLine(line.name(), given -> given.named(name)))) {
+                session.transect().set(name);
+            }
+        });
+    }
+
+    /** {@return the transect that is chosen, if there is one} */
+    Optional<ControlLine> selectedLine() {
+        return drawing().line(session.transect().get());
     }
 
     private GriddedValues surface(List<Layer> layers, Limit limit, String lid) {
@@ -146,11 +182,28 @@ public final class DraftModel implements Drafting {
     private boolean tried(Runnable edit) {
         try {
             edit.run();
+            refusal.set("");
             return true;
-        } catch (Refusal refusal) {
-            session.status().set(refusal.getMessage());
+        } catch (Refusal refused) {
+            refuse(refused.getMessage());
             return false;
         }
+    }
+
+    /** Tells why something is refused, in the status line and beside what it is about. */
+    void refuse(String why) {
+        refusal.set(why);
+        session.status().set(why);
+    }
+
+    /** {@return why the last step was refused; empty if it was taken} */
+    ReadOnlyStringProperty refusal() {
+        return refusal.getReadOnlyProperty();
+    }
+
+    /** Something new is begun. */
+    void forgetRefusal() {
+        refusal.set("");
     }
 
     /** Undoes a step. */
@@ -216,10 +269,14 @@ public final class DraftModel implements Drafting {
      * @param chosen the tool
      */
     public void choose(Tool chosen) {
-        if (chosen.needsPrism() && selected().isEmpty()) {
-            session.status().set(Words.of("tool.needs"));
+        if (chosen == Tool.TRANSECT && !hasSolutes()) {
             return;
         }
+        if (chosen.needsPrism() && selected().isEmpty()) {
+            refuse(Words.of("tool.needs"));
+            return;
+        }
+        refusal.set("");
         tool.set(chosen);
         session.status().set(chosen.hint());
     }
@@ -257,6 +314,16 @@ public final class DraftModel implements Drafting {
 
     Optional<Grid> grid() {
         return session.set().get().map(set -> set.aquifer().grid());
+    }
+
+    /** {@return whether the open set has solutes, so that transects mean something} */
+    boolean hasSolutes() {
+        return session.set().get().filter(set -> !set.solutes().isEmpty()).isPresent();
+    }
+
+    /** The nearest place that a transect can have. */
+    Place onGrid(Place place) {
+        return grid().map(grid -> ControlLine.within(grid, place)).orElse(place);
     }
 
     /** How near two places count as one when prisms are cut or joined: far below what can be seen. */

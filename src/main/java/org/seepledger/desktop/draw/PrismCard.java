@@ -14,6 +14,7 @@ import javafx.scene.layout.GridPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
+import org.seepledger.desktop.pane.FieldFault;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.sketch.Shape;
 
@@ -91,13 +92,28 @@ final class PrismCard extends VBox {
         field.setId(id);
         field.getStyleClass().add("small");
         field.setPrefColumnCount(14);
-        field.setOnAction(entered -> take.accept(field.getText()));
+        FieldFault fault = new FieldFault(id + "-fault");
+        field.setOnAction(entered -> take(field, take, fault));
+        field.textProperty().addListener((text, before, after) -> fault.say(""));
         field.focusedProperty().addListener((focus, before, now) -> {
             if (!now && field != boundary && field != buffer && !field.getText().equals(field.getUserData())) {
-                take.accept(field.getText());
+                take(field, take, fault);
             }
         });
-        rows.addRow(rows.getRowCount(), label, field);
+        model.session().selected().addListener((selected, before, after) -> fault.say(""));
+        label.setLabelFor(field);
+        rows.addRow(rows.getRowCount(), label, new VBox(2, field, fault));
+    }
+
+    private void take(TextField field, Consumer<String> take, FieldFault fault) {
+        model.forgetRefusal();
+        take.accept(field.getText());
+        fault.say(model.refusal().get());
+    }
+
+    /** Moves the keyboard to the name. */
+    void focusName() {
+        name.requestFocus();
     }
 
     private static Button button(String key, Runnable does) {

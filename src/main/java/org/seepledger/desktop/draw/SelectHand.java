@@ -46,6 +46,11 @@ final class SelectHand {
                         Hit.at(model.drawing(), pointer, near, preferred).filter(hit -> !(hit instanceof Hit.Vertex)));
     }
 
+    /** Whether a vertex of the selected prism is there, which comes before transects that cross it. */
+    boolean isOnVertex(Touch touch) {
+        return at(touch).filter(Hit.Vertex.class::isInstance).isPresent();
+    }
+
     Aim aim() {
         if (under.isEmpty()) {
             return Aim.PAN;

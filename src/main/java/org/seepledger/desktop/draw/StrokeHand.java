@@ -12,7 +12,7 @@ import org.seepledger.sketch.Shape;
 import org.seepledger.sketch.Snapping;
 import org.seepledger.sketch.Stroke;
 
-/** Draws place by place: a new prism, an island, the line that cuts a prism, or that of a section. */
+/** Draws place by place: a new prism, an island, the line that cuts a prism, that of a section, or a transect. */
 final class StrokeHand {
 
     private final DraftModel model;
@@ -26,7 +26,8 @@ final class StrokeHand {
     }
 
     void hover(Touch touch) {
-        pointer = Optional.of(snapper.held(Snapping.to(model.drawing(), model.grid()), touch));
+        Place held = snapper.held(Snapping.to(model.drawing(), model.grid()), touch);
+        pointer = Optional.of(isTransect() ? model.onGrid(held) : held);
     }
 
     void press(Touch touch) {
@@ -70,6 +71,7 @@ final class StrokeHand {
                         .map(shape -> model.step(
                                 "step.split", drawing -> drawing.split(shape.name(), stroke.places(), model.near())))
                         .orElse(false);
+            case TRANSECT -> Fresh.transect(model, stroke.places());
             case SECTION -> section();
             default -> draw();
         };
@@ -77,6 +79,10 @@ final class StrokeHand {
             cancel();
             model.choose(Tool.SELECT);
         }
+    }
+
+    private boolean isTransect() {
+        return model.tool().get() == Tool.TRANSECT;
     }
 
     private Drawing island(Drawing drawing, Shape shape) {
@@ -93,7 +99,7 @@ final class StrokeHand {
             model.session().sectionLine().set(Optional.of(line));
             return true;
         } catch (Refusal refusal) {
-            model.session().status().set(refusal.getMessage());
+            model.refuse(refusal.getMessage());
             return false;
         }
     }

@@ -19,7 +19,10 @@ public enum Tool {
     /** Makes the selected prism and another one. */
     MERGE("M"),
     /** Draws the line of the section. */
-    SECTION("A");
+    SECTION("A"),
+
+    /** Draws a transect vertex by vertex; of sets with solutes alone. */
+    TRANSECT("D");
 
     private final String keys;
 

@@ -5,8 +5,11 @@ import javafx.scene.control.Button;
 import javafx.scene.control.TextField;
 import javafx.scene.control.ToggleButton;
 import javafx.scene.control.Tooltip;
+import javafx.scene.input.KeyCode;
+import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.VBox;
+import org.seepledger.desktop.pane.FieldFault;
 import org.seepledger.desktop.words.Words;
 
 /** What one draws with: tools, a field for typed values, and the card of the selected prism. */
@@ -15,6 +18,8 @@ public final class Tray extends HBox {
     private final DraftModel model;
     private final DraftHand hand;
     private final PrismCard card;
+    private final FieldFault typedFault = new FieldFault("typed-fault");
+    private Runnable leave = () -> {};
     private final TextField typed = new TextField();
 
     /**
@@ -50,11 +55,9 @@ public final class Tray extends HBox {
         typed.setId("typed");
         typed.getStyleClass().add("small");
         typed.setPrefColumnCount(8);
-        typed.setOnAction(entered -> {
-            if (hand.type(typed.getText())) {
-                typed.clear();
-            }
-        });
+        typed.setOnAction(entered -> take());
+        typed.addEventFilter(KeyEvent.KEY_PRESSED, this::leave);
+        typed.textProperty().addListener((text, before, after) -> typedFault.say(""));
         model.tool().addListener((tool, before, after) -> prompt(after));
         prompt(Tool.SELECT);
         Button prism = new Button(Words.of("card.open"));
@@ -63,8 +66,27 @@ public final class Tray extends HBox {
         prism.setTooltip(new Tooltip(Words.of("action.card")));
         prism.setMaxWidth(Double.MAX_VALUE);
         prism.setOnAction(pressed -> flipCard());
-        row.getChildren().addAll(typed, prism);
+        row.getChildren().addAll(typed, typedFault, prism);
         return row;
+    }
+
+    /** Nothing typed ends what is drawn, as Enter does on the map. */
+    private void take() {
+        if (typed.getText().isBlank()) {
+            hand.finish();
+            leave.run();
+        } else if (hand.type(typed.getText())) {
+            typed.clear();
+        } else {
+            typedFault.say(model.refusal().get());
+        }
+    }
+
+    private void leave(KeyEvent key) {
+        if (key.getCode() == KeyCode.ESCAPE && !key.isShiftDown()) {
+            leave.run();
+            key.consume();
+        }
     }
 
     private void prompt(Tool tool) {
@@ -83,12 +105,31 @@ public final class Tray extends HBox {
         });
         model.tool().addListener((chosen, before, after) -> button.setSelected(after == tool));
         button.setSelected(model.tool().get() == tool);
+        if (tool == Tool.TRANSECT) {
+            button.visibleProperty().bind(model.session().set().map(set -> model.hasSolutes()));
+            button.managedProperty().bind(button.visibleProperty());
+        }
         return button;
     }
 
     /** Shows the card of the selected prism, or puts it away. */
     public void flipCard() {
         card.setVisible(!card.isVisible());
+        if (card.isVisible()) {
+            card.focusName();
+        } else {
+            leave.run();
+        }
+    }
+
+    /**
+     * Says where the keyboard goes from here.
+     *
+     * @param back moves it to the map
+     */
+    public void whenLeft(Runnable back) {
+        leave = back;
+        card.addEventFilter(KeyEvent.KEY_PRESSED, this::leave);
     }
 
     /** Moves the keyboard to the field for typed values. */

@@ -44,6 +44,7 @@ public final class ExchangeView extends BorderPane {
         belongs.textProperty().bind(model.belongs());
         Button copy = new Button(Words.of("ledger.copy"));
         copy.setId("exchange-copy");
+        copy.setMinWidth(USE_PREF_SIZE);
         copy.setTooltip(new Tooltip(Words.of("ledger.copy.tip")));
         copy.setOnAction(pressed -> model.copy());
         Region gap = new Region();

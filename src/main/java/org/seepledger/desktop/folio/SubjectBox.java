@@ -3,10 +3,7 @@ package org.seepledger.desktop.folio;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import javafx.geometry.Pos;
 import javafx.scene.control.ChoiceBox;
-import javafx.scene.layout.HBox;
-import javafx.scene.layout.Priority;
 import javafx.util.StringConverter;
 import org.seepledger.aquifer.Solute;
 import org.seepledger.desktop.session.OpenSet;
@@ -14,15 +11,18 @@ import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.words.Words;
 
 /** Whose budget all pages show: the water's, or a solute's. Not there where the set has no solutes. */
-final class SubjectBox extends HBox {
+final class SubjectBox extends ChoiceBox<String> {
+
+    private static final double WIDTH = 136;
 
     private final Session session;
-    private final ChoiceBox<String> subjects = new ChoiceBox<>();
 
     SubjectBox(Session session) {
         this.session = session;
-        subjects.setId("subject");
-        subjects.setConverter(new StringConverter<>() {
+        setId("subject");
+        setPrefWidth(WIDTH);
+        setMinWidth(USE_PREF_SIZE);
+        setConverter(new StringConverter<>() {
             @Override
             public String toString(String solute) {
                 return solute == null || solute.isEmpty()
@@ -35,16 +35,13 @@ final class SubjectBox extends HBox {
                 throw new UnsupportedOperationException();
             }
         });
-        subjects.valueProperty().addListener((value, before, after) -> {
+        valueProperty().addListener((value, before, after) -> {
             if (after != null) {
                 session.solute().set(after);
             }
         });
-        session.solute().addListener((solute, before, after) -> subjects.setValue(after));
+        session.solute().addListener((solute, before, after) -> setValue(after));
         session.set().addListener((set, before, after) -> fill(after));
-        setAlignment(Pos.CENTER_RIGHT);
-        setHgrow(this, Priority.ALWAYS);
-        getChildren().add(subjects);
         managedProperty().bind(visibleProperty());
         fill(session.set().get());
     }
@@ -52,8 +49,8 @@ final class SubjectBox extends HBox {
     private void fill(Optional<OpenSet> set) {
         List<String> all = new ArrayList<>(List.of(""));
         set.ifPresent(open -> open.solutes().stream().map(Solute::name).forEach(all::add));
-        subjects.getItems().setAll(all);
-        subjects.setValue(session.solute().get());
+        getItems().setAll(all);
+        setValue(session.solute().get());
         setVisible(all.size() > 1);
     }
 

@@ -18,7 +18,9 @@ import org.seepledger.desktop.command.CommandText;
 import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.port.Opener;
+import org.seepledger.desktop.session.DrawnShapes;
 import org.seepledger.desktop.session.OpenSet;
+import org.seepledger.desktop.session.Opening;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.task.EntryGuard;
 import org.seepledger.desktop.task.Lane;
@@ -39,6 +41,7 @@ import org.seepledger.unit.Figures;
 /** Handing over the prisms that are drawn: what is chosen, what is wrong with it, how far it is, what came of it. */
 public final class HandoverModel {
 
+    private static final FileDialogs.Kind CSV = new FileDialogs.Kind("CSV", "*.csv");
     private static final Duration REST = Duration.ofMillis(200);
 
     private final Session session;
@@ -110,6 +113,7 @@ public final class HandoverModel {
             choices.budget().every().set(Periods.Every.INTERVAL);
         }
         choices.plume().set(hasSolutes());
+        choices.solutes().transects().text().set("");
         session.set()
                 .get()
                 .ifPresent(set -> choices.out().text().set(suggested(set).toString()));
@@ -191,6 +195,25 @@ public final class HandoverModel {
         return advance.share();
     }
 
+    /** Saved lines lie in a file beside the aquifer. */
+    private void suggestTransects() {
+        DrawnShapes shapes = session.shapes().get();
+        Entry<Path> transects = choices.solutes().transects();
+        if (shapes.saved()
+                && !shapes.drawing().lines().isEmpty()
+                && transects.value().isEmpty()) {
+            session.set()
+                    .get()
+                    .ifPresent(set -> transects
+                            .text()
+                            .set(set.path()
+                                    .resolve(Opening.TRANSECTS)
+                                    .toAbsolutePath()
+                                    .normalize()
+                                    .toString()));
+        }
+    }
+
     /** {@return whether the open set has solutes to strike budgets of} */
     public boolean hasSolutes() {
         return session.set().get().filter(set -> set.workbench().hasSolutes()).isPresent();
@@ -268,9 +291,22 @@ public final class HandoverModel {
                 .ifPresent(folder -> choices.out().text().set(folder.toString()));
     }
 
+    /** Asks for a file of transects. */
+    public void chooseTransects() {
+        FileDialogs.Kind lines = new FileDialogs.Kind("GeoJSON", "*.geojson");
+        dialogs.fileToRead(Words.of("handover.transects.title"), lines)
+                .ifPresent(file -> choices.solutes().transects().text().set(file.toString()));
+    }
+
+    /** Asks for a file of measured panels. */
+    public void choosePanels() {
+        dialogs.fileToRead(Words.of("handover.panels.title"), CSV)
+                .ifPresent(file -> choices.solutes().panels().text().set(file.toString()));
+    }
+
     /** Asks for a file of periods. */
     public void choosePeriods() {
-        dialogs.fileToRead(Words.of("handover.periods.title"), new FileDialogs.Kind("CSV", "*.csv"))
+        dialogs.fileToRead(Words.of("handover.periods.title"), CSV)
                 .ifPresent(file -> choices.budget().periods().text().set(file.toString()));
     }
 
@@ -330,6 +366,7 @@ public final class HandoverModel {
     /** Goes back to what is chosen. */
     public void chooseAgain() {
         stage.set(Stage.CHOOSING);
+        suggestTransects();
         look();
     }
 

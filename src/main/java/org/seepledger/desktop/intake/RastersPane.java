@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.TreeSet;
 import java.util.stream.IntStream;
 import javafx.geometry.VPos;
+import javafx.scene.control.Button;
 import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
 import javafx.scene.image.ImageView;
@@ -65,10 +66,15 @@ final class RastersPane extends VBox {
         file.setMaxWidth(BESIDE);
         VBox beside = new VBox(8, facts);
         if (item.files().size() > 1) {
+            Button leaveOut = new Button(Words.of("intake.leave.out"));
+            leaveOut.setId("intake-leave-out");
+            leaveOut.getStyleClass().add("small");
+            leaveOut.setOnAction(pressed -> model.leaveOut(file.getValue()));
             beside.getChildren().add(0, file);
+            beside.getChildren().add(leaveOut);
         }
         if (item.bandCount() > 1) {
-            beside.getChildren().add(beside.getChildren().size() - 1, band);
+            beside.getChildren().add(beside.getChildren().indexOf(facts), band);
         }
         beside.setPrefWidth(BESIDE);
         FlowPane preview = new FlowPane(16, 10, frame, beside);

@@ -5,6 +5,7 @@ import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
 import javafx.scene.Node;
+import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.GridPane;
@@ -18,6 +19,7 @@ import org.seepledger.io.table.TableLook;
 final class TablePane extends VBox {
 
     private static final int LINES = 6;
+    private static final double PLACE_WIDTH = 122;
 
     private final IntakeModel model;
     private final Item.Table item;
@@ -53,15 +55,14 @@ final class TablePane extends VBox {
         for (int column = 0; column < look.columns().size(); column++) {
             int index = column;
             List<Place> places = new ArrayList<>(Arrays.asList(Place.values()));
-            grid.add(
-                    Form.choice(
-                            "intake-place-" + column,
-                            places,
-                            item.places().get(column),
-                            TablePane::words,
-                            place -> model.change(now -> ((Item.Table) now).withPlace(index, place))),
-                    column,
-                    0);
+            ComboBox<Place> place = Form.choice(
+                    "intake-place-" + column,
+                    places,
+                    item.places().get(column),
+                    TablePane::words,
+                    chosen -> model.change(now -> ((Item.Table) now).withPlace(index, chosen)));
+            place.setPrefWidth(PLACE_WIDTH);
+            grid.add(place, column, 0);
             Label heading = new Label(look.columns().get(column).heading());
             heading.getStyleClass().add("sl-strong");
             heading.setMinWidth(USE_PREF_SIZE);

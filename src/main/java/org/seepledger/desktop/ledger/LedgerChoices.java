@@ -36,6 +36,7 @@ final class LedgerChoices extends VBox {
         getStyleClass().add("sl-choices");
         Label belongs = line("ledger-belongs", model.belongs(), "sl-belongs");
         Label closure = line("ledger-closure", model.closure(), "sl-small");
+        closure.setTooltip(new Tooltip(Words.of("ledger.closure.why")));
         closure.managedProperty().bind(closure.textProperty().isNotEmpty());
         Label notes = line("ledger-notes", model.notes(), "sl-small", "sl-warning");
         notes.managedProperty().bind(notes.textProperty().isNotEmpty());

@@ -3,6 +3,7 @@ package org.seepledger.desktop.ledger;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.DoubleStream;
+import org.seepledger.desktop.port.CopyTable;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.io.table.CsvText;
 import org.seepledger.ledger.Disclaimer;
@@ -18,37 +19,8 @@ import org.seepledger.ledger.SoluteCautions;
  */
 record LedgerCopy(String title, String unit, String massUnit, List<LedgerRow> rows) {
 
-    String tabSeparated() {
-        StringBuilder text = new StringBuilder(plain(title)).append('\n');
-        text.append(String.join("\t", header())).append('\n');
-        for (LedgerRow row : rows) {
-            text.append(String.join("\t", cells(row))).append('\n');
-        }
-        return text.append(plain(caution())).append('\n').toString();
-    }
-
-    String html() {
-        StringBuilder text = new StringBuilder("<table><caption>");
-        text.append(escaped(title)).append("</caption><thead><tr>");
-        header().forEach(cell -> text.append("<th>").append(escaped(cell)).append("</th>"));
-        text.append("</tr></thead><tbody>");
-        for (LedgerRow row : rows) {
-            if (row.kind() == LedgerRow.Kind.HEADING) {
-                text.append("<tr><th colspan=\"" + header().size() + "\">")
-                        .append(escaped(row.label()))
-                        .append("</th></tr>");
-            } else {
-                text.append("<tr>");
-                cells(row)
-                        .forEach(cell ->
-                                text.append("<td>").append(escaped(cell)).append("</td>"));
-                text.append("</tr>");
-            }
-        }
-        return text.append("</tbody></table><p>")
-                .append(escaped(caution()))
-                .append("</p>")
-                .toString();
+    CopyTable table() {
+        return new CopyTable(title, header(), rows.stream().map(this::cells).toList(), caution());
     }
 
     private String caution() {
@@ -71,12 +43,14 @@ record LedgerCopy(String title, String unit, String massUnit, List<LedgerRow> ro
     }
 
     private List<String> cells(LedgerRow row) {
-        List<String> cells = new ArrayList<>(List.of(CsvText.text(plain(row.label()))));
-        boolean heading = row.kind() == LedgerRow.Kind.HEADING;
+        List<String> cells = new ArrayList<>(List.of(row.label()));
+        if (row.kind() == LedgerRow.Kind.HEADING) {
+            return cells;
+        }
         DoubleStream numbers = ofSolute()
                 ? DoubleStream.of(row.inflow(), row.outflow(), row.net(), row.low(), row.high())
                 : DoubleStream.of(row.inflow(), row.outflow(), row.net());
-        numbers.forEach(number -> cells.add(heading ? "" : CsvText.number(number)));
+        numbers.forEach(number -> cells.add(CsvText.number(number)));
         cells.add(unit(row.kind()));
         return cells;
     }
@@ -88,16 +62,5 @@ record LedgerCopy(String title, String unit, String massUnit, List<LedgerRow> ro
             case HELD -> massUnit;
             case ENTRY, TOTAL -> unit;
         };
-    }
-
-    private static String plain(String text) {
-        return text.replaceAll("[\\p{Cntrl}]+", " ");
-    }
-
-    private static String escaped(String text) {
-        return text.replace("&", "&amp;")
-                .replace("<", "&lt;")
-                .replace(">", "&gt;")
-                .replace("\"", "&quot;");
     }
 }

@@ -59,8 +59,8 @@ public final class LedgerModel {
         this.session = session;
         this.sheets = new LedgerSheets(session, live, reading, plumes, masses);
         this.copies = copies;
-        sheets.causes().forEach(cause -> cause.addListener(changed -> show()));
-        sheets.states().forEach(cause -> cause.addListener(changed -> showState()));
+        sheets.causes().forEach(cause -> cause.addListener((value, before, after) -> show()));
+        sheets.states().forEach(cause -> cause.addListener((value, before, after) -> showState()));
         arrangement.addListener((arranged, before, after) -> show());
         order.addListener((ordered, before, after) -> show());
         show();
@@ -150,11 +150,22 @@ public final class LedgerModel {
 
     /** Asks where the number of the chosen row comes from. */
     public void askOrigin() {
+        if (sheets.ofSolute()) {
+            session.notices().refuse(Words.of("ledger.origin.water"));
+            return;
+        }
         chosen.get()
-                .filter(row -> row.kind() != LedgerRow.Kind.HEADING)
-                .ifPresentOrElse(
-                        row -> session.asked().set(Optional.of(new RowAsked(row.group(), row.item(), row.layer()))),
-                        () -> session.notices().refuse(Words.of("ledger.origin.none")));
+                .filter(row -> row.kind() != LedgerRow.Kind.HEADING && row.kind() != LedgerRow.Kind.HELD)
+                .ifPresentOrElse(this::askOrigin, () -> session.notices().refuse(Words.of("ledger.origin.none")));
+    }
+
+    /**
+     * Asks where the number of a row comes from.
+     *
+     * @param row the row
+     */
+    public void askOrigin(LedgerRow row) {
+        session.asked().set(Optional.of(new RowAsked(row.group(), row.item(), row.layer())));
     }
 
     /** {@return the first row about the face that is lit up, if there is one} */
@@ -174,8 +185,7 @@ public final class LedgerModel {
     /** Copies the rows with their units, in full precision. */
     public void copy() {
         if (!rows.isEmpty() && !belongs.get().isEmpty()) {
-            LedgerCopy copy = new LedgerCopy(copyTitle, unit.get(), massUnit.get(), rows);
-            copies.table(copy.tabSeparated(), copy.html());
+            new LedgerCopy(copyTitle, unit.get(), massUnit.get(), rows).table().on(copies);
             session.notices().done(Words.of("ledger.copied", belongs.get()));
         }
     }

@@ -4,9 +4,9 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.ToDoubleFunction;
-import javafx.beans.Observable;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.StringProperty;
+import javafx.beans.value.ObservableValue;
 import org.seepledger.balance.Periods;
 import org.seepledger.desktop.budget.LiveBudget;
 import org.seepledger.desktop.budget.Reading;
@@ -40,7 +40,7 @@ import org.seepledger.unit.Figures;
 record LedgerSheets(Session session, LiveBudget live, Reading reading, LivePlume plumes, MassReading masses) {
 
     /** All that the sheet depends on. */
-    List<Observable> causes() {
+    List<ObservableValue<?>> causes() {
         return List.of(
                 live.known(),
                 plumes.known(),
@@ -53,7 +53,7 @@ record LedgerSheets(Session session, LiveBudget live, Reading reading, LivePlume
     }
 
     /** All that how it stands with the sheet depends on. */
-    List<Observable> states() {
+    List<ObservableValue<?>> states() {
         return List.of(live.now(), live.record(), plumes.nowState(), plumes.recordState());
     }
 

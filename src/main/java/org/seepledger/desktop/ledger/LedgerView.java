@@ -23,7 +23,10 @@ public final class LedgerView extends BorderPane {
 
     private static final KeyCombination COPY = new KeyCodeCombination(KeyCode.C, KeyCombination.SHORTCUT_DOWN);
     private static final PseudoClass HEADING = PseudoClass.getPseudoClass("heading");
-    private static final double BRACKET = 84;
+    private static final double NUMBER = 86;
+    private static final double LONG_NUMBER = 100;
+    private static final double NAME = 150;
+    private static final double SHORT_NAME = 122;
     private static final PseudoClass TOTAL = PseudoClass.getPseudoClass("total");
 
     private final LedgerModel model;
@@ -49,7 +52,6 @@ public final class LedgerView extends BorderPane {
     private void buildTable() {
         table.setId("ledger-table");
         table.setItems(model.rows().filtered(row -> !LedgerFoot.isTotal(row)));
-        table.setColumnResizePolicy(TableView.CONSTRAINED_RESIZE_POLICY_FLEX_LAST_COLUMN);
         table.setPlaceholder(new Label());
         table.getColumns().add(nameColumn());
         table.getColumns().add(numbers("ledger.in", Order.LARGEST_IN, LedgerRow::inflow));
@@ -58,6 +60,8 @@ public final class LedgerView extends BorderPane {
         table.getColumns().add(bracket("ledger.zero", "ledger.zero.tip", LedgerRow::low));
         table.getColumns().add(bracket("ledger.limit", "ledger.limit.tip", LedgerRow::high));
         table.getColumns().add(scaleColumn());
+        fit(model.solute().get());
+        model.solute().addListener((solute, before, after) -> fit(after));
         table.setRowFactory(made -> new KindRow());
         table.getSelectionModel().selectedItemProperty().addListener((row, before, after) -> {
             model.chosen().set(Optional.ofNullable(after));
@@ -79,6 +83,17 @@ public final class LedgerView extends BorderPane {
         });
     }
 
+    /** A solute's columns are more than there may be room for, and then scroll; no number is cut short. */
+    private void fit(String solute) {
+        boolean ofWater = solute.isEmpty();
+        table.setColumnResizePolicy(
+                ofWater ? TableView.CONSTRAINED_RESIZE_POLICY_FLEX_LAST_COLUMN : TableView.UNCONSTRAINED_RESIZE_POLICY);
+        table.getColumns().get(0).setPrefWidth(ofWater ? NAME : SHORT_NAME);
+        table.getColumns().stream()
+                .filter(column -> column.getStyleClass().contains("sl-numbers"))
+                .forEach(column -> column.setPrefWidth(ofWater ? NUMBER : LONG_NUMBER));
+    }
+
     /** Selects the row of the face that is lit up, and lets go of others. */
     private void follow() {
         following = true;
@@ -97,7 +112,7 @@ public final class LedgerView extends BorderPane {
         TableColumn<LedgerRow, LedgerRow> column = new TableColumn<>();
         column.setGraphic(header("ledger.item", Order.AS_DRAWN));
         column.setMinWidth(110);
-        column.setPrefWidth(136);
+        column.setPrefWidth(NAME);
         return shown(column, new NameCell.Factory());
     }
 
@@ -105,8 +120,8 @@ public final class LedgerView extends BorderPane {
         TableColumn<LedgerRow, LedgerRow> column = new TableColumn<>();
         column.setGraphic(header(words, order));
         column.getStyleClass().add("sl-numbers");
-        column.setMinWidth(84);
-        column.setPrefWidth(92);
+        column.setMinWidth(82);
+        column.setPrefWidth(NUMBER);
         return shown(column, new NumberCell.Factory(value, model));
     }
 
@@ -118,16 +133,15 @@ public final class LedgerView extends BorderPane {
         header.setTooltip(new Tooltip(Words.of(tip)));
         column.setGraphic(header);
         column.getStyleClass().add("sl-numbers");
-        column.setMinWidth(BRACKET);
-        column.setPrefWidth(BRACKET);
+        column.setMinWidth(NUMBER);
         column.visibleProperty().bind(model.solute().isNotEmpty());
         return shown(column, new NumberCell.Factory(value, model));
     }
 
     private TableColumn<LedgerRow, LedgerRow> scaleColumn() {
         TableColumn<LedgerRow, LedgerRow> column = new TableColumn<>();
-        column.setMinWidth(48);
-        column.setPrefWidth(56);
+        column.setMinWidth(40);
+        column.setPrefWidth(44);
         return shown(column, new ScaleCell.Factory(model));
     }
 

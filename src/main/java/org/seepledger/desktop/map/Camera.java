@@ -83,7 +83,7 @@ public record Camera(double width, double height, double centreX, double centreY
     }
 
     /** {@return the same as pictures know it} */
-    MapFrame frame() {
+    public MapFrame frame() {
         return new MapFrame(new Box(0, 0, width, height), mapX(0), mapY(0), scale);
     }
 

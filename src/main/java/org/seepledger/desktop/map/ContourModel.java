@@ -10,7 +10,7 @@ import org.seepledger.desktop.task.Lane;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.picture.Contours;
 import org.seepledger.picture.Drape;
-import org.seepledger.picture.Ticks;
+import org.seepledger.picture.RoundValues;
 import org.seepledger.picture.ValueScale;
 import org.seepledger.progress.Progress;
 
@@ -51,11 +51,11 @@ final class ContourModel {
             return;
         }
         Pyramid pyramid = view.get().pyramid();
-        Ticks levels = Ticks.within(scale.get().from(), scale.get().to(), MOST_LEVELS);
+        RoundValues levels = scale.get().ticks(MOST_LEVELS);
         drawing.run(progress -> draw(pyramid, levels, progress), lines::set, fault -> lines.set(List.of()));
     }
 
-    private static List<Contour> draw(Pyramid pyramid, Ticks levels, Progress progress) {
+    private static List<Contour> draw(Pyramid pyramid, RoundValues levels, Progress progress) {
         if (pyramid.isFlat()) {
             return List.of();
         }

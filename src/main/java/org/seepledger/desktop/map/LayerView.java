@@ -1,5 +1,6 @@
 package org.seepledger.desktop.map;
 
+import java.util.Optional;
 import org.seepledger.job.MapQuantity;
 import org.seepledger.picture.ValueScale;
 
@@ -9,8 +10,9 @@ import org.seepledger.picture.ValueScale;
  * @param request what was asked for
  * @param pyramid its values
  * @param natural the colours that the values themselves suggest
+ * @param limits the limits of non-detects; empty where there are none
  */
-record LayerView(Request request, Pyramid pyramid, ValueScale natural) {
+record LayerView(Request request, Pyramid pyramid, ValueScale natural, Optional<Pyramid> limits) {
 
     /**
      * A question for values.

@@ -8,6 +8,7 @@ import javafx.scene.canvas.GraphicsContext;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.control.TextField;
+import javafx.scene.control.ToggleButton;
 import javafx.scene.control.Tooltip;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
@@ -15,13 +16,14 @@ import javafx.scene.layout.Region;
 import javafx.scene.layout.VBox;
 import org.seepledger.desktop.paint.MarkPainter;
 import org.seepledger.desktop.paint.SharpCanvas;
+import org.seepledger.desktop.pane.FieldFault;
 import org.seepledger.desktop.theme.Theme;
 import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.job.MapQuantity;
 import org.seepledger.picture.Ink;
 import org.seepledger.picture.Mark;
-import org.seepledger.picture.Ticks;
+import org.seepledger.picture.RoundValues;
 import org.seepledger.picture.ValueScale;
 
 /** Which colour stands for which value; a click opens fields to type the ends of the range, or to fit them to what is shown. */
@@ -37,6 +39,7 @@ final class Legend extends VBox {
     private final SharpCanvas bar = new SharpCanvas(this::show);
     private final TextField from = field("range-from");
     private final TextField to = field("range-to");
+    private final FieldFault fault = new FieldFault("range-fault");
     private final HBox ends = new HBox(5);
 
     Legend(ValuesModel model, ObservableValue<Theme> theme) {
@@ -50,6 +53,7 @@ final class Legend extends VBox {
         title.setTooltip(new Tooltip(Words.of("action.legend")));
         title.setOnAction(pressed -> turn());
         title.setMaxWidth(WIDTH);
+        title.setWrapText(true);
         bar.setOnMouseClicked(click -> turn());
         Region gap = new Region();
         HBox.setHgrow(gap, Priority.ALWAYS);
@@ -57,11 +61,12 @@ final class Legend extends VBox {
         fit.setId("range-fit");
         fit.getStyleClass().addAll("small", "flat");
         fit.setOnAction(pressed -> model.fitRange());
-        ends.getChildren().addAll(from, new Label(Words.of("map.range.to")), to, gap, fit);
+        ends.getChildren().addAll(from, new Label(Words.of("map.range.to")), to, gap, logarithmic(), fit);
         ends.setAlignment(Pos.CENTER_LEFT);
         ends.setVisible(false);
         ends.managedProperty().bind(ends.visibleProperty());
-        getChildren().addAll(title, bar, ends);
+        fault.visibleProperty().bind(ends.visibleProperty());
+        getChildren().addAll(title, bar, new NonDetectKey(model, theme), ends, fault);
         setMaxSize(USE_PREF_SIZE, USE_PREF_SIZE);
         for (TextField field : List.of(from, to)) {
             field.setOnAction(entered -> take());
@@ -78,6 +83,24 @@ final class Legend extends VBox {
         show();
     }
 
+    /** Equal ratios in place of equal differences, where that makes sense. */
+    private ToggleButton logarithmic() {
+        ToggleButton log = new ToggleButton(Words.of("map.range.logarithmic"));
+        log.setId("range-log");
+        log.getStyleClass().addAll("small", "flat");
+        log.setTooltip(new Tooltip(Words.of("map.range.logarithmic.tip")));
+        log.managedProperty().bind(log.visibleProperty());
+        log.setOnAction(pressed -> model.logarithmic(log.isSelected()));
+        Runnable follow = () -> {
+            log.setVisible(model.mayBeLogarithmic());
+            log.setSelected(model.isLogarithmic());
+        };
+        model.scale().addListener((scale, before, after) -> follow.run());
+        model.view().addListener((view, before, after) -> follow.run());
+        follow.run();
+        return log;
+    }
+
     /** Opens the fields for another range, or folds them away. */
     void turn() {
         ends.setVisible(!ends.isVisible());
@@ -91,7 +114,7 @@ final class Legend extends VBox {
         return field;
     }
 
-    /** What cannot be taken is put back as it was. */
+    /** What cannot be taken stays as it was typed, with the reason below. */
     private void take() {
         Optional<ValueScale> scale = model.scale().get();
         if (scale.isEmpty()) {
@@ -102,7 +125,7 @@ final class Legend extends VBox {
             return;
         }
         if (!model.range(number(from.getText()), number(to.getText()))) {
-            show();
+            fault.say(Words.of(model.isLogarithmic() ? "map.range.log" : "map.range.refused"));
         }
     }
 
@@ -128,6 +151,7 @@ final class Legend extends VBox {
     }
 
     private void show() {
+        fault.say("");
         Optional<ValueScale> scale = model.scale().get();
         setVisible(scale.isPresent() && model.view().get().isPresent());
         if (isVisible()) {
@@ -150,9 +174,9 @@ final class Legend extends VBox {
         }
         double[] placement = {length / colours.length, 0, 0, BAR, SIDE, 0};
         painter.paint(List.of(new Mark.Image(colours.length, 1, colours, placement)));
-        Ticks ticks = Ticks.within(scale.from(), scale.to(), 4);
+        RoundValues ticks = scale.ticks(4);
         for (int i = 0; i < ticks.count(); i++) {
-            double x = SIDE + length * (ticks.values().get(i) - scale.from()) / (scale.to() - scale.from());
+            double x = SIDE + length * scale.share(ticks.values().get(i));
             double[] tick = {x, BAR, x, BAR + 4};
             painter.paint(List.of(
                     new Mark.Line(tick, Mark.Stroke.of(Ink.Token.MUTED, 1)),

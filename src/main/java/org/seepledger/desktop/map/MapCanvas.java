@@ -85,6 +85,11 @@ final class MapCanvas extends Region {
         guests.add(guest);
     }
 
+    /** Lets something else draw over the map, below what was invited before. */
+    void layBelow(MarkSource guest) {
+        guests.add(0, guest);
+    }
+
     private void repaintGround() {
         groundStale = true;
         repaint();
@@ -133,6 +138,11 @@ final class MapCanvas extends Region {
         tiles.wear(model.values().view().get(), model.values().scale().get(), opacity);
         tiles.pyramid().ifPresent(pyramid -> new TilePainter(canvas, camera, outputScale(), tiles, pyramid).paint());
         MarkPainter painter = new MarkPainter(canvas, theme.getValue());
+        model.values()
+                .view()
+                .get()
+                .flatMap(LayerView::limits)
+                .ifPresent(limits -> painter.paint(NonDetectHatch.of(limits, camera)));
         if (model.overlays().lines().get()) {
             painter.paint(GridLines.of(aquifer.grid(), camera, outputScale()));
         }

@@ -1,11 +1,14 @@
 package org.seepledger.desktop.map;
 
+import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
+import javafx.beans.property.ReadOnlyStringProperty;
+import javafx.beans.property.ReadOnlyStringWrapper;
 import javafx.beans.property.SimpleObjectProperty;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.desktop.session.OpenSet;
@@ -14,6 +17,7 @@ import org.seepledger.desktop.task.EntryGuard;
 import org.seepledger.desktop.task.Lane;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.words.FaultWords;
+import org.seepledger.desktop.words.Words;
 import org.seepledger.report.CellPlace;
 
 /** What the map shows: which part of it, which values, and where the cursor is. */
@@ -28,11 +32,15 @@ public final class MapModel {
     private static final double NEAREST_CELL = 600;
     private static final double STEP = 1.25;
 
+    /** How near the cursor is to a well under it, in logical pixels. */
+    private static final double WELL = 8;
+
     private final Session session;
     private final Overlays overlays = new Overlays();
     private final ObjectProperty<Camera> camera = new SimpleObjectProperty<>(new Camera(0, 0, 0, 0, 1));
     private final ReadOnlyObjectWrapper<Optional<Readout>> readout = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final Lane lookingForWells;
+    private final ReadOnlyStringWrapper well = new ReadOnlyStringWrapper("");
     private final ValuesModel values;
     private final FluxModel flux;
     private final ContourModel contours;
@@ -83,7 +91,7 @@ public final class MapModel {
                                     return set.workbench().wells(interval);
                                 },
                                 session.wells()::set,
-                                fault -> session.status().set(FaultWords.of(fault))),
+                                fault -> session.notices().refuse(FaultWords.of(fault))),
                         () -> session.wells().set(List.of()));
     }
 
@@ -170,6 +178,7 @@ public final class MapModel {
      */
     public void point(double x, double y) {
         Camera seen = camera.get();
+        well.set(wellAt(x, y));
         session.along().set(SectionTrace.along(session.sectionLine().get(), seen, x, y));
         readout.set(session.set()
                 .get()
@@ -182,8 +191,23 @@ public final class MapModel {
                         session.numbers().get())));
     }
 
+    private String wellAt(double x, double y) {
+        Camera seen = camera.get();
+        return session.wells().get().stream()
+                .filter(well -> Math.hypot(seen.x(well.x()) - x, seen.y(well.y()) - y) <= WELL)
+                .min(Comparator.comparingDouble(well -> Math.hypot(seen.x(well.x()) - x, seen.y(well.y()) - y)))
+                .map(well -> Words.of("map.well", well.name(), well.category()))
+                .orElse("");
+    }
+
+    /** {@return the well under the cursor, its name in full; empty where there is none} */
+    public ReadOnlyStringProperty well() {
+        return well.getReadOnlyProperty();
+    }
+
     /** The cursor has left. */
     public void leave() {
+        well.set("");
         readout.set(Optional.empty());
         session.along().set(OptionalDouble.empty());
     }

@@ -1,6 +1,7 @@
 package org.seepledger.desktop.map;
 
 import java.util.List;
+import java.util.function.Function;
 import javafx.beans.value.ObservableValue;
 import javafx.geometry.Insets;
 import javafx.geometry.Pos;
@@ -16,6 +17,8 @@ import org.seepledger.desktop.action.Action;
 import org.seepledger.desktop.pane.StatePane;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.theme.Theme;
+import org.seepledger.picture.MapFrame;
+import org.seepledger.picture.Mark;
 
 /** The map pane. */
 public final class MapView extends BorderPane {
@@ -81,6 +84,15 @@ public final class MapView extends BorderPane {
         canvas.addEventHandler(MouseEvent.MOUSE_MOVED, this::onMoved);
         canvas.addEventHandler(MouseEvent.MOUSE_EXITED, left -> model.leave());
         canvas.addEventHandler(ScrollEvent.SCROLL, this::onScroll);
+    }
+
+    /**
+     * Lets something else draw over the map, below what the hand draws.
+     *
+     * @param guest gives the marks for a frame
+     */
+    public void lay(Function<MapFrame, List<Mark>> guest) {
+        canvas.layBelow(camera -> guest.apply(camera.frame()));
     }
 
     /** Moves the keyboard to the map. */

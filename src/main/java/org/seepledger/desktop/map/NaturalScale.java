@@ -20,6 +20,7 @@ final class NaturalScale {
             case IMBALANCE -> ValueScale.aboutZero(sorted);
             case FLUX -> ValueScale.over(Arrays.copyOf(sorted, (int) Math.ceil(SHARE * sorted.length)));
             case SOURCE -> sorted.length > 0 && sorted[0] < 0 ? ValueScale.aboutZero(sorted) : ValueScale.over(sorted);
+            case CONCENTRATION, MEAN_CONCENTRATION -> ValueScale.ofConcentrations(sorted);
             case HEAD, THICKNESS, SATURATED_THICKNESS -> ValueScale.over(sorted);
         };
     }

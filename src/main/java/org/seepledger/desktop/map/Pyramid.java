@@ -1,8 +1,10 @@
 package org.seepledger.desktop.map;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import org.seepledger.aquifer.Axis;
+import org.seepledger.aquifer.Grid;
 
 /**
  * Values on a lattice, and the same reduced to half the rows and columns again and again: the mean of those of four that
@@ -30,6 +32,12 @@ final class Pyramid {
 
         float at(int row, int column) {
             return values[row * columns + column];
+        }
+
+        double[] doubles() {
+            double[] all = new double[values.length];
+            Arrays.setAll(all, i -> values[i]);
+            return all;
         }
 
         Level reduced() {
@@ -87,6 +95,15 @@ final class Pyramid {
             levels.add(last);
         }
         return new Pyramid(lattice, levels);
+    }
+
+    /** The value at a place; NaN off the grid. */
+    float at(double mapX, double mapY) {
+        Grid grid = lattice.grid();
+        int column = (int) Math.floor(grid.localX(mapX, mapY) / lattice.stepX());
+        int fromSouth = (int) Math.floor(grid.localY(mapX, mapY) / lattice.stepY());
+        boolean on = column >= 0 && fromSouth >= 0 && column < lattice.columns() && fromSouth < lattice.rows();
+        return on ? levels.get(0).at(lattice.rows() - 1 - fromSouth, column) : Float.NaN;
     }
 
     /** The values of a row of cells, west to east; of an uneven grid those of the texels in the middle of cells. */

@@ -6,6 +6,7 @@ import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.Grid;
 import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.desktop.words.Words;
+import org.seepledger.job.MapQuantity;
 import org.seepledger.unit.Figures;
 
 /**
@@ -28,23 +29,20 @@ public record Readout(String place, String cell, String value) {
         }
         String cell = Words.of("map.cell", grid.flipped(fromSouth) + 1, column + 1, layer + 1);
         return new Readout(
-                place, cell, view.map(shown -> value(shown, grid, x, y, form)).orElse(""));
+                place, cell, view.map(shown -> value(shown, x, y, form)).orElse(""));
     }
 
-    private static String value(LayerView shown, Grid grid, double x, double y, NumberForm form) {
-        Lattice lattice = shown.pyramid().lattice();
-        int column = (int) (grid.localX(x, y) / lattice.stepX());
-        int fromSouth = (int) (grid.localY(x, y) / lattice.stepY());
-        int row = Math.max(0, Math.min(lattice.rows() - 1, lattice.rows() - 1 - fromSouth));
-        float value = shown.pyramid().level(0).at(row, Math.min(column, lattice.columns() - 1));
-        String label = shown.request().quantity().label();
-        return Float.isNaN(value)
-                ? Words.of("map.novalue", label)
-                : Words.of(
-                        "map.value",
-                        label,
-                        form.of(Figures.typeset(value)),
-                        shown.request().quantity().unit());
+    private static String value(LayerView shown, double x, double y, NumberForm form) {
+        MapQuantity quantity = shown.request().quantity();
+        float value = shown.pyramid().at(x, y);
+        float limit = shown.limits().map(limits -> limits.at(x, y)).orElse(Float.NaN);
+        if (Float.isNaN(value)) {
+            return Float.isNaN(limit)
+                    ? Words.of("map.novalue", quantity.label())
+                    : Words.of("map.nondetect", quantity.label(), form.of(Figures.typeset(limit)), quantity.unit());
+        }
+        String text = Words.of("map.value", quantity.label(), form.of(Figures.typeset(value)), quantity.unit());
+        return Float.isNaN(limit) ? text : Words.of("map.halfdetect", text);
     }
 
     /** To a tenth of a plan unit, thousands kept apart. */

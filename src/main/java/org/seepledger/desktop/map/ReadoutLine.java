@@ -9,11 +9,14 @@ final class ReadoutLine extends HBox {
 
     private final Label place = part("readout-place", 230);
     private final Label cell = part("readout-cell", 210);
-    private final Label value = part("readout-value", 280);
+    private final Label value = part("readout-value", 240);
+    private final Label well = part("readout-well", 0);
 
     ReadoutLine(MapModel model) {
         getStyleClass().add("sl-readout");
-        getChildren().addAll(place, cell, value);
+        getChildren().addAll(place, cell, value, well);
+        well.setPrefWidth(USE_COMPUTED_SIZE);
+        well.textProperty().bind(model.well());
         model.readout().addListener((readout, before, after) -> show(after));
     }
 

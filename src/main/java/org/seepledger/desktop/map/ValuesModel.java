@@ -127,7 +127,9 @@ public final class ValuesModel {
                         1,
                         progress);
         ValueScale natural = NaturalScale.of(request.quantity(), layer.values());
-        return new LayerView(request, Pyramid.of(lattice, layer.values()), natural);
+        Optional<Pyramid> limits =
+                layer.hasNonDetects() ? Optional.of(Pyramid.of(lattice, layer.limits())) : Optional.empty();
+        return new LayerView(request, Pyramid.of(lattice, layer.values()), natural, limits);
     }
 
     private void show(LayerView read) {
@@ -158,7 +160,7 @@ public final class ValuesModel {
 
     /** Takes the range of the values that are shown. */
     public void fitRange() {
-        view.get().ifPresent(shown -> colour(shown, shown.natural()));
+        view.get().ifPresent(shown -> colour(shown, natural(shown, isLogarithmic())));
     }
 
     /**
@@ -173,9 +175,39 @@ public final class ValuesModel {
             session.status().set(Words.of("map.range.refused"));
             return false;
         }
+        boolean logarithmic = isLogarithmic();
+        if (logarithmic && !(from > 0)) {
+            session.status().set(Words.of("map.range.log"));
+            return false;
+        }
         view.get()
-                .ifPresent(shown -> colour(shown, new ValueScale(shown.natural().ramp(), from, to)));
+                .ifPresent(shown -> colour(shown, new ValueScale(shown.natural().ramp(), from, to, logarithmic)));
         return true;
+    }
+
+    /** {@return whether the scale is logarithmic} */
+    boolean isLogarithmic() {
+        return scale.get().filter(ValueScale::logarithmic).isPresent();
+    }
+
+    /** {@return whether the scale may be logarithmic: of concentrations} */
+    boolean mayBeLogarithmic() {
+        return view.get()
+                .filter(shown -> shown.request().quantity().isConcentration())
+                .isPresent();
+    }
+
+    /** Takes a logarithmic scale, or a linear one again, as the values suggest. */
+    void logarithmic(boolean wanted) {
+        view.get()
+                .filter(shown -> mayBeLogarithmic() && wanted != isLogarithmic())
+                .ifPresent(shown -> colour(shown, natural(shown, wanted)));
+    }
+
+    private static ValueScale natural(LayerView shown, boolean logarithmic) {
+        return logarithmic
+                ? shown.natural().logarithmicOver(shown.pyramid().level(0).doubles())
+                : shown.natural();
     }
 
     private void colour(LayerView shown, ValueScale taken) {

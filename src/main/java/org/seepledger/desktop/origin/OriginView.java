@@ -10,7 +10,6 @@ import javafx.beans.property.SimpleObjectProperty;
 import javafx.beans.value.ObservableValue;
 import javafx.collections.ListChangeListener;
 import javafx.collections.transformation.SortedList;
-import javafx.geometry.Pos;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
@@ -22,7 +21,6 @@ import javafx.scene.control.TextField;
 import javafx.scene.control.Tooltip;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.HBox;
-import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 import org.seepledger.desktop.pane.StatePane;
 import org.seepledger.desktop.words.Words;
@@ -54,7 +52,6 @@ public final class OriginView extends BorderPane {
         sought.setId("origin-sought");
         sought.setPromptText(Words.of("origin.sought"));
         sought.textProperty().bindBidirectional(model.sought());
-        HBox.setHgrow(sought, Priority.ALWAYS);
         Button export = button("origin.export", "origin-export", model::export);
         Button copy = button("origin.copy", "origin-copy", model::copyCommand);
         Tooltip command = new Tooltip();
@@ -64,15 +61,14 @@ public final class OriginView extends BorderPane {
         Button again = button("origin.again", "origin-again", model::again);
         again.visibleProperty().bind(model.changed());
         again.managedProperty().bind(model.changed());
-        HBox tools = new HBox(8, sought, export, copy);
-        tools.setAlignment(Pos.CENTER_LEFT);
+        HBox tools = new HBox(8, export, copy, again);
         VBox head = new VBox(
                 line("origin-belongs", model.belongs(), "sl-strong"),
                 line("origin-sum", model.sum(), "sl-answer"),
                 line("origin-remark", model.remark(), "sl-warning"),
-                again,
+                tools,
                 line("origin-shown", model.shown(), "sl-small"),
-                tools);
+                sought);
         head.getStyleClass().add("sl-choices");
         return head;
     }

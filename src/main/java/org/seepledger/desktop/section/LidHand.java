@@ -2,10 +2,8 @@ package org.seepledger.desktop.section;
 
 import java.math.BigDecimal;
 import java.math.RoundingMode;
-import java.util.Comparator;
 import java.util.Optional;
 import java.util.OptionalInt;
-import java.util.stream.IntStream;
 import org.seepledger.desktop.session.Drafting;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.words.Words;
@@ -29,10 +27,6 @@ final class LidHand {
     /** Where along a body the handles are, so that they keep clear of the flow in its middle. */
     static final double HANDLE = 0.25;
 
-    private static final double HANDLE_REACH = 7;
-    private static final double LINE_REACH = 5;
-    private static final double CAPTURE = 8;
-    private static final double RELEASE = 12;
     private static final double DRAG = 3;
 
     private final Session session;
@@ -58,74 +52,28 @@ final class LidHand {
         return model.section().get().flatMap(Section::body);
     }
 
-    private static double height(Body.Slab slab, Lid lid) {
-        return lid == Lid.TOP ? slab.top() : slab.bottom();
+    private Optional<LidHits> hits() {
+        return model.section().get().flatMap(section -> model.frame().get().map(frame -> new LidHits(section, frame)));
     }
 
     /** The lid of the selected prism at a place, if one is near. */
     Optional<Lid> at(double x, double y) {
-        Optional<SectionFrame> frame = model.frame().get();
-        if (frame.isEmpty() || body().isEmpty()) {
-            return Optional.empty();
-        }
-        // Where both lie together, what is above the body means its top.
-        return IntStream.range(0, 2)
-                .mapToObj(i -> Lid.values()[i])
-                .filter(lid -> distance(body().get(), lid, frame.get(), x, y) <= 0)
-                .min(Comparator.comparingDouble(lid -> offLine(body().get(), lid, frame.get(), x, y)
-                        + (lid == Lid.TOP ? 1e-6 : -1e-6) * (y - lineY(body().get(), lid, frame.get(), x))));
+        return hits().flatMap(hits -> hits.lidAt(x, y));
     }
 
-    /** How far a place is beyond what counts as on a lid; not above 0 where it is on it. */
-    private static double distance(Body body, Lid lid, SectionFrame frame, double x, double y) {
-        double toHandle = body.spot(frame, HANDLE)
-                .map(spot -> Math.hypot(x - frame.x(spot.along()), y - frame.y(height(spot.slab(), lid))))
-                .orElse(Double.POSITIVE_INFINITY);
-        return Math.min(toHandle - HANDLE_REACH, offLine(body, lid, frame, x, y) - LINE_REACH);
-    }
-
-    private static double offLine(Body body, Lid lid, SectionFrame frame, double x, double y) {
-        return Math.abs(y - lineY(body, lid, frame, x));
-    }
-
-    /** The y of a lid at an x; of the nearest slab where there is none. */
-    private static double lineY(Body body, Lid lid, SectionFrame frame, double x) {
-        double along = frame.along(x);
-        return body.slabs().stream()
-                .filter(slab -> along >= slab.from() && along <= slab.to())
-                .findFirst()
-                .map(slab -> frame.y(height(slab, lid)))
-                .orElse(Double.POSITIVE_INFINITY);
-    }
-
-    /** Takes hold of a lid, or chooses the prism there; false if there is neither. */
+    /** Takes hold of a lid, or chooses the prism there; false if there is no lid. */
     boolean press(double x, double y) {
         Optional<Lid> lid = at(x, y);
         if (lid.isPresent()) {
-            SectionFrame frame = model.frame().get().orElseThrow();
-            double line = lineY(body().orElseThrow(), lid.get(), frame, x);
-            grip = Optional.of(new Grip(lid.get(), Double.isFinite(line) ? y - line : 0, x, y));
+            grip = Optional.of(new Grip(lid.get(), hits().orElseThrow().below(lid.get(), x, y), x, y));
             session.lit().set(lid.get().item());
             return true;
         }
-        bodyAt(x, y).ifPresent(body -> {
+        hits().flatMap(hits -> hits.bodyAt(x, y)).ifPresent(body -> {
             session.selected().set(body.name());
             session.lit().set("");
         });
         return false;
-    }
-
-    private Optional<Body> bodyAt(double x, double y) {
-        return model.frame()
-                .get()
-                .flatMap(frame -> model.section().get().stream()
-                        .flatMap(section -> section.bodies().stream())
-                        .filter(body -> body.slabs().stream()
-                                .anyMatch(slab -> frame.along(x) >= slab.from()
-                                        && frame.along(x) <= slab.to()
-                                        && frame.y(slab.top()) - LINE_REACH <= y
-                                        && frame.y(slab.bottom()) + LINE_REACH >= y))
-                        .reduce((lower, upper) -> upper));
     }
 
     /** Whether a lid is pressed or dragged. */
@@ -167,9 +115,10 @@ final class LidHand {
                 .get()
                 .flatMap(section -> section.profile().at(frame.along(x)))
                 .map(Profile.Stretch::column);
+        LidSnapping snapping = new LidSnapping(lid, reach, layers(), frame);
         held = free
                 ? OptionalInt.empty()
-                : column.map(found -> held(lid, reach, found, frame, y)).orElse(held);
+                : column.map(found -> snapping.at(found, y, held)).orElse(held);
         if (held.isPresent()) {
             return new Limit.Layer(held.getAsInt());
         }
@@ -182,29 +131,6 @@ final class LidHand {
                     : Math.min(elevation, rounded(fixed.height() - step, step));
         }
         return new Limit.Elevation(elevation);
-    }
-
-    /** The layer whose surface holds the lid: the one that held it before until it is farther than release. */
-    private OptionalInt held(Lid lid, Reach reach, Profile.Column column, SectionFrame frame, double y) {
-        if (held.isPresent() && away(lid, held.getAsInt(), column, frame, y) <= RELEASE) {
-            return held;
-        }
-        int first = lid == Lid.BOTTOM && Lid.TOP.in(reach, layers()) instanceof Limit.Layer top ? top.index() : 0;
-        int last = lid == Lid.TOP && Lid.BOTTOM.in(reach, layers()) instanceof Limit.Layer bottom
-                ? bottom.index()
-                : layers() - 1;
-        // Where layers pinch out, of those with the same surface the one that has thickness beyond it.
-        return IntStream.rangeClosed(first, last)
-                .filter(layer -> away(lid, layer, column, frame, y) <= CAPTURE)
-                .boxed()
-                .min(Comparator.<Integer>comparingDouble(layer -> away(lid, layer, column, frame, y))
-                        .thenComparing(lid == Lid.TOP ? Comparator.reverseOrder() : Comparator.naturalOrder()))
-                .map(OptionalInt::of)
-                .orElse(OptionalInt.empty());
-    }
-
-    private static double away(Lid lid, int layer, Profile.Column column, SectionFrame frame, double y) {
-        return Math.abs(frame.y(column.surfaces()[lid == Lid.TOP ? layer : layer + 1]) - y);
     }
 
     /** A power of ten not above the height of a pixel. */
@@ -274,7 +200,7 @@ final class LidHand {
                 ? elevation.height()
                 : body().get()
                         .spot(frame.get(), HANDLE)
-                        .map(spot -> height(spot.slab(), lid))
+                        .map(spot -> LidHits.height(spot.slab(), lid))
                         .orElse(Double.NaN);
         if (Double.isNaN(height)) {
             return false;

@@ -4,8 +4,8 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import org.seepledger.desktop.words.Words;
-import org.seepledger.picture.Body;
 import org.seepledger.picture.Ink;
+import org.seepledger.picture.Lettering;
 import org.seepledger.picture.Mark;
 import org.seepledger.picture.Section;
 import org.seepledger.picture.SectionFrame;
@@ -34,7 +34,7 @@ final class LidMarks {
                     handle(x, shown, hand.chosen().equals(Optional.of(lid)), marks);
                 }
                 if (hand.moving().equals(Optional.of(lid))) {
-                    moving(section, spot.slab(), lid, hand, x, y, marks);
+                    moving(section, lid, hand, x, y, frame.box().x(), marks);
                 }
             }
         });
@@ -66,9 +66,12 @@ final class LidMarks {
         return ring;
     }
 
-    /** Where a lid is: its elevation or, between two uprights, the layer that holds it. */
+    /**
+     * Where a lid is: its elevation or, between two uprights, the layer that holds it; to the left, where there is room,
+     * since the flow stands to the right.
+     */
     private static void moving(
-            Section section, Body.Slab slab, Lid lid, LidHand hand, double x, double y, List<Mark> marks) {
+            Section section, Lid lid, LidHand hand, double x, double y, double left, List<Mark> marks) {
         String words = hand.text(lid);
         if (hand.isHeld()) {
             for (Mark.Stroke stroke :
@@ -83,7 +86,11 @@ final class LidMarks {
             words = words + " " + section.lengthUnit();
         }
         double below = lid == Lid.TOP ? -10 : 20;
-        Mark.Text text = Mark.Text.of(x + GLYPH + 8, y + below, words, SIZE, Mark.Anchor.START);
+        double room = Lettering.width(words, SIZE) + GLYPH + 8;
+        boolean leftward = x - room > left;
+        Mark.Text text = leftward
+                ? Mark.Text.of(x - GLYPH - 8, y + below, words, SIZE, Mark.Anchor.END)
+                : Mark.Text.of(x + GLYPH + 8, y + below, words, SIZE, Mark.Anchor.START);
         marks.add(text.strong().haloed().in(Ink.Token.ACCENT));
     }
 }

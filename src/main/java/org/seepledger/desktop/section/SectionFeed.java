@@ -55,6 +55,7 @@ final class SectionFeed {
     SectionFeed(Session session, Tasks tasks) {
         this.session = session;
         this.inquiry = new Inquiry<>(tasks.latest("task.section"), this::answer);
+        session.set().addListener((set, before, after) -> within.set(OptionalDouble.empty()));
         for (Observable cause : List.of(
                 session.set(),
                 session.sectionLine(),

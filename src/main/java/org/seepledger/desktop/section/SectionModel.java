@@ -32,6 +32,12 @@ public final class SectionModel {
 
     private static final double FARTHEST = 8;
 
+    /** How much one turn of a wheel may do. */
+    private static final double MOST_AT_ONCE = 10;
+
+    private static final double LEAST_TIMES = 0.01;
+    private static final double MOST_TIMES = 10_000;
+
     private final Session session;
     private final SectionFeed feed;
     private final ReadOnlyObjectWrapper<Optional<SectionFrame>> frame = new ReadOnlyObjectWrapper<>(Optional.empty());
@@ -169,7 +175,11 @@ public final class SectionModel {
      * @param up how much larger heights become
      */
     void zoom(double x, double y, double across, double up) {
-        frame.get().ifPresent(seen -> look(seen.zoomed(x, y, across, up)));
+        frame.get().ifPresent(seen -> look(seen.zoomed(x, y, atOnce(across), atOnce(up))));
+    }
+
+    private static double atOnce(double factor) {
+        return Math.max(1 / MOST_AT_ONCE, Math.min(MOST_AT_ONCE, factor));
     }
 
     /** Goes nearer or farther about the middle, by steps. */
@@ -196,7 +206,7 @@ public final class SectionModel {
             return true;
         }
         double times = number(text);
-        if (!(times > 0) || !Double.isFinite(times)) {
+        if (!(times >= LEAST_TIMES && times <= MOST_TIMES)) {
             session.status().set(Words.of("section.times.refused"));
             return false;
         }

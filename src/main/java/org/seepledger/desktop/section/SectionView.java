@@ -15,10 +15,10 @@ import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.StackPane;
 import org.seepledger.desktop.action.Action;
+import org.seepledger.desktop.pane.FieldFault;
 import org.seepledger.desktop.pane.StatePane;
 import org.seepledger.desktop.theme.Theme;
 import org.seepledger.desktop.words.Words;
-import org.seepledger.picture.SectionFrame;
 import org.seepledger.sketch.Lid;
 
 /** The pane of the section. */
@@ -27,6 +27,7 @@ public final class SectionView extends BorderPane {
     private static final double LEAST_HEIGHT = 236;
     private final SectionModel model;
     private final SectionCanvas canvas;
+    private final FieldFault fault = new FieldFault("section-fault");
     private final TextField times = field("section-times", 4);
     private final TextField within = field("section-within", 5);
     private final TextField top = field("section-top", 5);
@@ -50,13 +51,15 @@ public final class SectionView extends BorderPane {
         setCenter(new StatePane(new StackPane(canvas, ring), model.state())
                 .withAction(Words.of("section.draw"), model::draw));
         new SectionMouse(model, canvas).begin();
-        model.frame().addListener((frame, before, after) -> after.ifPresent(this::show));
+        model.frame()
+                .addListener((frame, before, after) -> put(
+                        times, after.map(seen -> shorter(seen.exaggeration())).orElse("")));
         model.session().drawing().addListener((drawing, before, after) -> showLids());
         model.session().selected().addListener((selected, before, after) -> showLids());
         showLids();
         model.section()
-                .addListener(
-                        (section, before, after) -> after.ifPresent(shown -> put(within, shorter(shown.within()))));
+                .addListener((section, before, after) ->
+                        put(within, after.map(shown -> shorter(shown.within())).orElse("")));
     }
 
     /** {@return what is typed and pressed above the section} */
@@ -75,6 +78,7 @@ public final class SectionView extends BorderPane {
         HBox bar = new HBox(
                 6,
                 readout,
+                fault,
                 muted("section.top"),
                 top,
                 muted("section.bottom"),
@@ -118,11 +122,13 @@ public final class SectionView extends BorderPane {
     }
 
     /** A value is taken by Enter, and when the keyboard leaves the field; one that is refused is put back. */
-    private static void take(TextField field, Predicate<String> taken) {
+    private void take(TextField field, Predicate<String> taken) {
+        field.textProperty().addListener((text, before, after) -> fault.say(""));
         Runnable take = () -> {
             String before = (String) field.getUserData();
             if (!field.getText().equals(before) && !taken.test(field.getText())) {
                 field.setText(before);
+                fault.say(model.session().status().get());
             }
         };
         field.setOnAction(entered -> take.run());
@@ -156,10 +162,6 @@ public final class SectionView extends BorderPane {
     private void focusTyped() {
         boolean isBottom = model.lids().chosen().equals(Optional.of(Lid.BOTTOM));
         (isBottom ? bottom : top).requestFocus();
-    }
-
-    private void show(SectionFrame frame) {
-        put(times, shorter(frame.exaggeration()));
     }
 
     /** {@return what can be done with the section} */

@@ -2,18 +2,20 @@ package org.seepledger.desktop.session;
 
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Optional;
 import org.seepledger.desktop.task.EntryGuard;
 import org.seepledger.io.aquifer.AquiferReader;
 import org.seepledger.job.DrawingFile;
 import org.seepledger.job.Workbench;
+import org.seepledger.sketch.ControlLine;
 
 /**
  * A folder as it was opened.
  *
  * @param set the set
- * @param kept the prisms that lie beside it
- * @param unsaved prisms that were drawn and not saved when the program last ended
+ * @param kept the prisms and transects that lie beside it
+ * @param unsaved prisms and transects that were drawn and not saved when the program last ended
  */
 public record Opening(OpenSet set, DrawingFile kept, Optional<DrawingFile> unsaved) implements AutoCloseable {
 
@@ -22,6 +24,12 @@ public record Opening(OpenSet set, DrawingFile kept, Optional<DrawingFile> unsav
 
     /** What prisms are called that are drawn and not saved. */
     public static final String UNSAVED = "prisms.unsaved.geojson";
+
+    /** What the transects beside an aquifer with solutes are called. */
+    public static final String TRANSECTS = "transects.geojson";
+
+    /** What transects are called that are drawn and not saved. */
+    public static final String UNSAVED_TRANSECTS = "transects.unsaved.geojson";
 
     /**
      * Opens an aquifer folder and reads the prisms beside it.
@@ -35,10 +43,10 @@ public record Opening(OpenSet set, DrawingFile kept, Optional<DrawingFile> unsav
         Path path = isSetFile(folder) ? folder.toAbsolutePath().getParent() : folder;
         OpenSet set = new OpenSet(path, Workbench.open(path));
         try {
-            return new Opening(
-                    set,
-                    drawing(path.resolve(PRISMS), set).orElse(DrawingFile.NONE),
-                    drawing(path.resolve(UNSAVED), set));
+            DrawingFile kept = drawing(path.resolve(PRISMS), set)
+                    .orElse(DrawingFile.NONE)
+                    .with(lines(path.resolve(TRANSECTS), set).orElse(List.of()));
+            return new Opening(set, kept, unsaved(path, set, kept));
         } catch (RuntimeException e) {
             set.close();
             throw e;
@@ -48,6 +56,24 @@ public record Opening(OpenSet set, DrawingFile kept, Optional<DrawingFile> unsav
     @Override
     public void close() {
         set.close();
+    }
+
+    /** Of the two files there may be one alone. */
+    private static Optional<DrawingFile> unsaved(Path path, OpenSet set, DrawingFile kept) {
+        Optional<DrawingFile> prisms = drawing(path.resolve(UNSAVED), set);
+        Optional<List<ControlLine>> lines = lines(path.resolve(UNSAVED_TRANSECTS), set);
+        return prisms.isEmpty() && lines.isEmpty()
+                ? Optional.empty()
+                : Optional.of(
+                        prisms.orElse(kept).with(lines.orElse(kept.drawing().lines())));
+    }
+
+    private static Optional<List<ControlLine>> lines(Path file, OpenSet set) {
+        return set.solutes().isEmpty() || !Files.isRegularFile(file)
+                ? Optional.empty()
+                : Optional.of(set.workbench().solutes().transects(file).stream()
+                        .map(ControlLine::of)
+                        .toList());
     }
 
     private static boolean isSetFile(Path path) {

@@ -29,8 +29,11 @@ public final class Session {
 
     private final ReadOnlyObjectWrapper<Optional<OpenSet>> set = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final ObjectProperty<Drawing> drawing = new SimpleObjectProperty<>(Drawing.NONE);
+    private final ObjectProperty<Transects> transects = new SimpleObjectProperty<>(Transects.NONE);
+    private final StringProperty transect = new SimpleStringProperty("");
     private final ObjectProperty<DrawnShapes> shapes = new SimpleObjectProperty<>(DrawnShapes.NONE);
     private final ObservableMap<String, ShownPicture> pictures = FXCollections.observableMap(new TreeMap<>());
+    private final ObjectProperty<Optional<String>> transectName = new SimpleObjectProperty<>(Optional.empty());
     private final IntegerProperty interval = new SimpleIntegerProperty();
     private final IntegerProperty layer = new SimpleIntegerProperty();
     private final StringProperty selected = new SimpleStringProperty("");
@@ -58,6 +61,8 @@ public final class Session {
         SHOW_IMBALANCE,
         /** To begin to draw a prism. */
         DRAW_PRISM,
+        /** To begin to draw a transect. */
+        DRAW_TRANSECT,
         /** To begin to draw the line of a section. */
         DRAW_SECTION
     }
@@ -74,6 +79,8 @@ public final class Session {
         marked.set(List.of());
         faceFlows.set(FaceFlows.NONE);
         solute.set("");
+        transect.set("");
+        transects.set(Transects.NONE);
         selected.set("");
         interval.set(0);
         layer.set(0);
@@ -91,6 +98,16 @@ public final class Session {
         return drawing;
     }
 
+    /** {@return the transects that are drawn} */
+    public ObjectProperty<Transects> transects() {
+        return transects;
+    }
+
+    /** {@return the name of the transect that is chosen; empty for none} */
+    public StringProperty transect() {
+        return transect;
+    }
+
     /** {@return what is drawn as shapes, for what writes it to a file} */
     public ObjectProperty<DrawnShapes> shapes() {
         return shapes;
@@ -99,6 +116,11 @@ public final class Session {
     /** {@return the pictures that views offer for handing over, by what they are called there; a view keeps its own up} */
     public ObservableMap<String, ShownPicture> pictures() {
         return pictures;
+    }
+
+    /** {@return the name that a pane asks for the chosen transect; whoever gives it empties it} */
+    public ObjectProperty<Optional<String>> transectName() {
+        return transectName;
     }
 
     /** {@return the interval looked at, from 0} */

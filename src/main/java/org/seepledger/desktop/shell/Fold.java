@@ -1,5 +1,6 @@
 package org.seepledger.desktop.shell;
 
+import javafx.application.Platform;
 import javafx.beans.property.BooleanProperty;
 import javafx.beans.property.SimpleBooleanProperty;
 import javafx.beans.value.ObservableDoubleValue;
@@ -44,9 +45,12 @@ final class Fold {
         this.size = settings.get(key).map(Fold::number).orElse(0.0);
         SplitPane.setResizableWithParent(pane, false);
         add();
+        // What the hand has not sized grows with the window, once the split has laid itself out.
         length().addListener((length, before, after) -> {
-            if (before.doubleValue() <= 0 || size <= 0) {
+            if (before.doubleValue() <= 0) {
                 place();
+            } else if (size <= 0) {
+                Platform.runLater(this::place);
             }
         });
         open.addListener((shown, before, after) -> {

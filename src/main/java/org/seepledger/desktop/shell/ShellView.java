@@ -7,7 +7,11 @@ import java.util.Set;
 import javafx.beans.value.ObservableValue;
 import javafx.geometry.Orientation;
 import javafx.scene.Node;
+import javafx.scene.Scene;
+import javafx.scene.control.ButtonBase;
+import javafx.scene.control.CheckBox;
 import javafx.scene.control.Control;
+import javafx.scene.control.ScrollPane;
 import javafx.scene.control.SplitPane;
 import javafx.scene.control.TextInputControl;
 import javafx.scene.input.KeyCode;
@@ -59,11 +63,13 @@ public final class ShellView extends StackPane {
     private final Optional<Fold> below;
     private final BorderPane work = new BorderPane();
     private final StackPane veil = new StackPane();
+    private final StackPane around = new StackPane();
+    private Optional<Node> before = Optional.empty();
     private final ActionsPage actionsPage;
     private final PreferencesPage preferencesPage;
     private final NoticePage noticePage;
     private final RunningList runningList;
-    private final CautionPage cautionPage = new CautionPage(this::lift);
+    private final CautionPage cautionPage;
 
     /**
      * Builds the frame.
@@ -85,6 +91,12 @@ public final class ShellView extends StackPane {
         this.model = model;
         this.slots = slots;
         this.actions = actions;
+        this.cautionPage = new CautionPage(
+                model.session()
+                        .set()
+                        .map(set ->
+                                set.filter(open -> !open.solutes().isEmpty()).isPresent()),
+                this::lift);
         this.actionsPage = new ActionsPage(actions, this::lift);
         work.setCenter(panes());
         this.preferencesPage = new PreferencesPage(preferences, this::lift);
@@ -104,8 +116,14 @@ public final class ShellView extends StackPane {
                 this::showCaution));
         veil.getStyleClass().add("sl-veil");
         veil.setVisible(false);
+        ScrollPane scroll = new ScrollPane(around);
+        scroll.setFitToWidth(true);
+        scroll.setFitToHeight(true);
+        scroll.setFocusTraversable(false);
+        scroll.getStyleClass().add("sl-clear");
+        veil.getChildren().add(scroll);
         veil.setOnMousePressed(press -> {
-            if (press.getTarget() == veil) {
+            if (press.getTarget() == around) {
                 lift();
             }
         });
@@ -115,12 +133,17 @@ public final class ShellView extends StackPane {
         work.visibleProperty().addListener((visible, before, after) -> requestLayout());
         work.setMinSize(LEAST_WIDTH, LEAST_HEIGHT);
         addEventFilter(KeyEvent.KEY_PRESSED, this::onKey);
+        for (Node part : List.of(this, veil)) {
+            part.addEventFilter(KeyEvent.KEY_PRESSED, ShellView::press);
+        }
+        sceneProperty().flatMap(Scene::focusOwnerProperty).addListener((owner, from, to) -> stayIn(to));
     }
 
     /** The page that is not shown needs no room, but is laid out, so that it is there at once when it is turned to. */
     @Override
     protected double computeMinWidth(double height) {
-        return shown().minWidth(height);
+        double least = shown().minWidth(height);
+        return shown() == work ? Math.max(least, work.getTop().minWidth(-1)) : least;
     }
 
     @Override
@@ -251,15 +274,23 @@ public final class ShellView extends StackPane {
      * @param page the page
      */
     public void lower(Node page) {
-        veil.getChildren().setAll(page);
+        if (!veil.isVisible()) {
+            before = Optional.ofNullable(getScene()).map(Scene::getFocusOwner);
+        }
+        around.getChildren().setAll(page);
         veil.setVisible(true);
+        // What lies in a scroll pane is in the scene, and can have the keyboard, only once its looks are there.
+        veil.applyCss();
+        veil.layout();
     }
 
     /** Puts away what is shown over all else. */
     public void lift() {
         veil.setVisible(false);
-        veil.getChildren().clear();
-        focusIn(model.atWelcome().get() ? slots.welcome() : slots.map());
+        around.getChildren().clear();
+        before.filter(node -> node.getScene() != null && holds(shown(), node))
+                .ifPresentOrElse(
+                        Node::requestFocus, () -> focusIn(model.atWelcome().get() ? slots.welcome() : slots.map()));
     }
 
     /** Text fields keep all keys but commands; other controls those that they work with themselves. */
@@ -273,6 +304,25 @@ public final class ShellView extends StackPane {
                 key.consume();
                 return;
             }
+        }
+    }
+
+    /** Enter presses the button that has the keyboard, not the one that is pressed by Enter when none has it. */
+    private static void press(KeyEvent key) {
+        boolean pressed = key.getTarget() instanceof ButtonBase && !(key.getTarget() instanceof CheckBox);
+        if (pressed && key.getCode() == KeyCode.ENTER) {
+            ((ButtonBase) key.getTarget()).fire();
+            key.consume();
+        }
+    }
+
+    /** While a page is read, the keyboard does not leave it. */
+    private void stayIn(Node owner) {
+        if (owner != null
+                && veil.isVisible()
+                && !holds(veil, owner)
+                && !around.getChildren().isEmpty()) {
+            focusIn(around);
         }
     }
 

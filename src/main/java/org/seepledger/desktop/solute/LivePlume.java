@@ -2,8 +2,8 @@ package org.seepledger.desktop.solute;
 
 import java.util.List;
 import java.util.Optional;
-import javafx.beans.Observable;
 import javafx.beans.property.ReadOnlyObjectProperty;
+import javafx.beans.value.ObservableValue;
 import org.seepledger.desktop.session.Drawing;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
@@ -69,9 +69,9 @@ public final class LivePlume {
                 (question, progress) ->
                         question.set.workbench().solutes().record(question.prisms, question.choice, progress));
         session.set().addListener((set, before, after) -> begin());
-        for (Observable cause :
+        for (ObservableValue<?> cause :
                 List.of(session.drawing(), session.selected(), session.interval(), session.solute(), look.changes())) {
-            cause.addListener(changed -> follow());
+            cause.addListener((value, before, after) -> follow());
         }
         whole.last().addListener((last, before, after) -> follow());
         begin();
@@ -97,7 +97,7 @@ public final class LivePlume {
         return whole.state();
     }
 
-    /** Asks again what was stopped or failed. */
+    /** Works out again what was stopped or failed. */
     public void again() {
         now.again();
         whole.again();

@@ -3,11 +3,11 @@ package org.seepledger.desktop.solute;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import javafx.beans.Observable;
 import javafx.beans.property.ReadOnlyLongProperty;
 import javafx.beans.property.ReadOnlyLongWrapper;
 import javafx.beans.property.SimpleStringProperty;
 import javafx.beans.property.StringProperty;
+import javafx.beans.value.ObservableValue;
 import org.seepledger.desktop.budget.Reading;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
@@ -41,8 +41,8 @@ public final class MassReading {
             rateUnit.set("");
             massUnit.set("");
         });
-        for (Observable choice : List.of(rateUnit, massUnit)) {
-            choice.addListener(changed -> changes.set(changes.get() + 1));
+        for (ObservableValue<?> choice : List.of(rateUnit, massUnit)) {
+            choice.addListener((value, before, after) -> changes.set(changes.get() + 1));
         }
     }
 

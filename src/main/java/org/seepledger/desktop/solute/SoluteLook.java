@@ -5,13 +5,13 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
-import javafx.beans.Observable;
 import javafx.beans.property.BooleanProperty;
 import javafx.beans.property.ObjectProperty;
 import javafx.beans.property.ReadOnlyLongProperty;
 import javafx.beans.property.ReadOnlyLongWrapper;
 import javafx.beans.property.SimpleBooleanProperty;
 import javafx.beans.property.SimpleObjectProperty;
+import javafx.beans.value.ObservableValue;
 import org.seepledger.aquifer.Solute;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
@@ -49,9 +49,8 @@ public final class SoluteLook {
      */
     public SoluteLook(Session session) {
         this.session = session;
-        session.set().addListener((set, before, after) -> threshold.set(Optional.empty()));
-        for (Observable cause : List.of(dispersion, threshold)) {
-            cause.addListener(changed -> changes.set(changes.get() + 1));
+        for (ObservableValue<?> cause : List.of(dispersion, threshold)) {
+            cause.addListener((value, before, after) -> changes.set(changes.get() + 1));
         }
     }
 
@@ -104,7 +103,7 @@ public final class SoluteLook {
      * Takes a concentration that was typed: a number in the solute's own unit, or with a unit after it; nothing for none.
      *
      * @param text what was typed
-     * @return whether it was taken: else the status line says what is wanted
+     * @return whether it was taken
      */
     public boolean type(String text) {
         if (text.isBlank()) {
@@ -115,9 +114,13 @@ public final class SoluteLook {
             threshold.set(Optional.of(typed(text)));
             return true;
         } catch (IllegalArgumentException e) {
-            session.status().set(Words.of("solute.threshold.refused", unit()));
             return false;
         }
+    }
+
+    /** {@return what can be typed, in a sentence} */
+    public String wanted() {
+        return Words.of("solute.threshold.refused", unit());
     }
 
     private Threshold typed(String text) {

@@ -101,7 +101,7 @@ public final class Inquiry<Q, A> {
             return false;
         }
         if (!same) {
-            state.set(working());
+            tell(working());
         }
         return !same;
     }
@@ -109,7 +109,7 @@ public final class Inquiry<Q, A> {
     private void settle() {
         lane.cancel();
         asked = Optional.empty();
-        state.set(PaneState.READY);
+        tell(PaneState.READY);
     }
 
     /** Tells that the last answer is outdated, and gives up what is being answered. */
@@ -117,7 +117,14 @@ public final class Inquiry<Q, A> {
         lane.cancel();
         asked = Optional.empty();
         wanted = Optional.empty();
-        state.set(working());
+        tell(working());
+    }
+
+    /** A state that is told again would set off whoever asks when told. */
+    private void tell(PaneState next) {
+        if (!next.equals(state.get())) {
+            state.set(next);
+        }
     }
 
     /** Old content is dimmed meanwhile, and it is said whose it is. */
@@ -134,7 +141,7 @@ public final class Inquiry<Q, A> {
         lane.cancel();
         asked = Optional.empty();
         wanted = Optional.empty();
-        state.set(why);
+        tell(why);
     }
 
     /**
@@ -162,7 +169,7 @@ public final class Inquiry<Q, A> {
     private void answered(Q question, A answer) {
         asked = Optional.empty();
         if (wanted.equals(Optional.of(question))) {
-            state.set(PaneState.READY);
+            tell(PaneState.READY);
         }
         last.set(Optional.of(new Reply<>(question, answer)));
         askNext(question);
@@ -171,7 +178,7 @@ public final class Inquiry<Q, A> {
     private void notAnswered(Q question, Throwable fault) {
         asked = Optional.empty();
         if (wanted.equals(Optional.of(question))) {
-            state.set(PaneState.failed(fault instanceof Cancelled ? Words.of("stopped.again") : FaultWords.of(fault)));
+            tell(PaneState.failed(fault instanceof Cancelled ? Words.of("stopped.again") : FaultWords.of(fault)));
         }
         askNext(question);
     }
@@ -180,7 +187,7 @@ public final class Inquiry<Q, A> {
     public void again() {
         if (asked.isEmpty() && state.get().phase() == PaneState.Phase.FAILED) {
             wanted.ifPresent(question -> {
-                state.set(working());
+                tell(working());
                 ask(question, Duration.ZERO);
             });
         }

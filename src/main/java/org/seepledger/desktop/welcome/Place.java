@@ -44,7 +44,8 @@ public record Place(Path folder, String title, String lead) {
                 .dropWhile(line -> line.isBlank() || line.startsWith("#"))
                 .takeWhile(line -> !line.isBlank())
                 .reduce("", (before, line) -> before + " " + line)
-                .strip();
+                .strip()
+                .replaceAll("\\[([^\\]]*)\\]\\([^)]*\\)", "$1");
         int end = text.indexOf(". ");
         return end < 0 ? text : text.substring(0, end + 1);
     }

@@ -5,6 +5,7 @@ import java.nio.file.Path;
 import java.util.List;
 import org.seepledger.aquifer.Times;
 import org.seepledger.io.table.CsvText;
+import org.seepledger.ledger.Account;
 import org.seepledger.ledger.Entry;
 import org.seepledger.ledger.Group;
 import org.seepledger.ledger.Period;
@@ -35,16 +36,15 @@ public final class BudgetCsv {
         "volume_unit"
     };
     private static final String ALL_LAYERS = "*";
-    private static final String NONE = "";
 
     private final Times times;
-    private final ResultUnits units;
     private final ResultTable rows;
+    private final AmountCells amounts;
 
     private BudgetCsv(Times times, ResultUnits units, ResultTable rows) {
         this.times = times;
-        this.units = units;
         this.rows = rows;
+        this.amounts = new AmountCells(rows, units);
     }
 
     /**
@@ -72,59 +72,22 @@ public final class BudgetCsv {
     private void write(String prism, PeriodBudget budget) throws IOException {
         Period period = budget.period();
         for (Entry entry : budget.entries()) {
-            String layer = String.valueOf(entry.account().layer() + 1);
-            begin(prism, period, entry.account().group(), entry.account().item(), layer);
-            for (double volume : new double[] {entry.inflow(), entry.outflow(), entry.net()}) {
-                rows.cell(rate(volume, period));
-            }
-            for (double volume : new double[] {entry.inflow(), entry.outflow(), entry.net()}) {
-                rows.cell(volume(volume));
-            }
-            end(units.rate().toString(), units.volume().toString());
+            Account account = entry.account();
+            begin(prism, period, account.group(), account.item(), String.valueOf(account.layer() + 1));
+            amounts.write(entry, period);
+            rows.endRow();
         }
         Totals totals = budget.totals();
         for (Total total : Total.rows(!Double.isNaN(totals.storageChange()))) {
-            write(prism, period, total, totals.get(total));
-        }
-    }
-
-    private void write(String prism, Period period, Total total, double value) throws IOException {
-        begin(prism, period, Group.TOTAL, total.toString(), ALL_LAYERS);
-        if (total.isPercentage()) {
-            nets(CsvText.number(value), NONE);
-            end("%", NONE);
-        } else {
-            nets(rate(value, period), volume(value));
-            end(units.rate().toString(), units.volume().toString());
-        }
-    }
-
-    private void nets(String rate, String volume) throws IOException {
-        for (String cell : new String[] {NONE, NONE, rate, NONE, NONE, volume}) {
-            rows.cell(cell);
+            begin(prism, period, Group.TOTAL, total.toString(), ALL_LAYERS);
+            amounts.write(total, totals.get(total), period);
+            rows.endRow();
         }
     }
 
     private void begin(String prism, Period period, Group group, String item, String layer) throws IOException {
-        rows.cell(CsvText.text(prism));
-        rows.cell(CsvText.text(period.name()));
+        rows.cells(CsvText.text(prism), CsvText.text(period.name()));
         rows.span(period, times);
-        rows.cell(group.toString());
-        rows.cell(CsvText.text(item));
-        rows.cell(layer);
-    }
-
-    private void end(String rateUnit, String volumeUnit) throws IOException {
-        rows.cell(rateUnit);
-        rows.cell(volumeUnit);
-        rows.endRow();
-    }
-
-    private String rate(double volume, Period period) {
-        return CsvText.number(volume / period.duration() * units.rateFactor());
-    }
-
-    private String volume(double volume) {
-        return CsvText.number(volume * units.volumeFactor());
+        rows.cells(group.toString(), CsvText.text(item), layer);
     }
 }

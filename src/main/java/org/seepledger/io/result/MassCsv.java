@@ -94,22 +94,24 @@ public final class MassCsv {
         double time = times.instant(instant);
         Measure unit = plume.solute().concentration().orElseThrow().unit();
         double factor = MassUnits.concentrationFactor(unit, length);
-        cells(CsvText.text(plume.prism()), CsvText.text(plume.solute().name()), String.valueOf(instant));
-        cells(CsvText.number(time), times.isoDate(time).orElse(""));
-        cells(layer == plume.layers() ? "*" : String.valueOf(plume.firstLayer() + layer + 1));
-        cells(mass(stock.dissolved(NonDetects.HALF)), mass(stock.sorbed(NonDetects.HALF)));
-        cells(mass(stock.total(NonDetects.HALF)));
-        cells(
+        rows.cells(CsvText.text(plume.prism()), CsvText.text(plume.solute().name()), String.valueOf(instant));
+        rows.cells(CsvText.number(time), times.isoDate(time).orElse(""));
+        rows.cells(layer == plume.layers() ? "*" : String.valueOf(plume.firstLayer() + layer + 1));
+        rows.cells(mass(stock.dissolved(NonDetects.HALF)), mass(stock.sorbed(NonDetects.HALF)));
+        rows.cells(mass(stock.total(NonDetects.HALF)));
+        rows.cells(
                 mass(stock.total(NonDetects.ZERO)),
                 mass(stock.total(NonDetects.LIMIT)),
                 units.mass().toString());
-        cells(CsvText.number(stock.undetectedShare()));
-        cells(String.valueOf(stock.detects()), String.valueOf(stock.nonDetects()));
-        cells(CsvText.number(stock.mean() * factor), CsvText.number(stock.maximum() * factor));
-        cells(CsvText.number(above.orElse(Double.NaN) * factor), unit.toString());
-        cells(volume(stock.water()), volume(stock.rock()));
-        cells(above.isPresent() ? volume(stock.rockAbove()) : "", units.volume().toString());
-        cells(
+        rows.cells(CsvText.number(stock.undetectedShare()));
+        rows.cells(String.valueOf(stock.detects()), String.valueOf(stock.nonDetects()));
+        rows.cells(CsvText.number(stock.mean() * factor), CsvText.number(stock.maximum() * factor));
+        rows.cells(CsvText.number(above.orElse(Double.NaN) * factor), unit.toString());
+        rows.cells(volume(stock.water()), volume(stock.rock()));
+        rows.cells(
+                above.isPresent() ? volume(stock.rockAbove()) : "",
+                units.volume().toString());
+        rows.cells(
                 above.isPresent() ? CsvText.number(stock.areaAbove()) : "",
                 units.area().toString());
         rows.endRow();
@@ -121,11 +123,5 @@ public final class MassCsv {
 
     private String volume(double volume) {
         return CsvText.number(volume * units.volumeFactor());
-    }
-
-    private void cells(String... cells) throws IOException {
-        for (String cell : cells) {
-            rows.cell(cell);
-        }
     }
 }

@@ -6,6 +6,7 @@ import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
+import java.util.function.ToDoubleFunction;
 import org.seepledger.aquifer.Times;
 import org.seepledger.io.table.CsvText;
 import org.seepledger.ledger.Entry;
@@ -52,13 +53,13 @@ public final class PlumeCsv {
     private static final String NONE = "";
 
     private final Times times;
-    private final MassUnits units;
     private final ResultTable rows;
+    private final AmountCells amounts;
 
     private PlumeCsv(Times times, MassUnits units, ResultTable rows) {
         this.times = times;
-        this.units = units;
         this.rows = rows;
+        this.amounts = new AmountCells(rows, units.ofBudget());
     }
 
     /**
@@ -113,24 +114,14 @@ public final class PlumeCsv {
 
     private void writeStock(Plume plume, Period period, int layer, String phase) throws IOException {
         begin(plume, period, "mass", phase, String.valueOf(plume.firstLayer() + layer + 1));
-        double[] held = new double[NonDetects.values().length];
-        for (NonDetects choice : NonDetects.values()) {
-            held[choice.ordinal()] = plume.held(
-                    times,
-                    period.to(),
-                    layer,
-                    stock -> phase.equals("sorbed") ? stock.sorbed(choice) : stock.dissolved(choice));
-        }
-        cells(
-                NONE,
-                NONE,
-                NONE,
-                NONE,
-                NONE,
-                mass(held[NonDetects.HALF.ordinal()]),
-                NONE,
-                units.mass().toString());
-        end(mass(held[0]), mass(held[1]), mass(held[2]));
+        ToDoubleFunction<NonDetects> held = choice -> plume.held(
+                times,
+                period.to(),
+                layer,
+                stock -> phase.equals("sorbed") ? stock.sorbed(choice) : stock.dissolved(choice));
+        rows.cells(NONE, NONE, NONE, NONE, NONE, amounts.amount(held.applyAsDouble(NonDetects.HALF)));
+        rows.cells(NONE, amounts.units().volume().toString());
+        end(held);
     }
 
     private void write(Plume plume, Period period, Map<NonDetects, PeriodBudget> budgets, int index)
@@ -142,54 +133,28 @@ public final class PlumeCsv {
                 entry.account().group().toString(),
                 entry.account().item(),
                 String.valueOf(entry.account().layer() + 1));
-        cells(rate(entry.inflow(), period), rate(entry.outflow(), period), rate(entry.net(), period));
-        cells(mass(entry.inflow()), mass(entry.outflow()), mass(entry.net()));
-        cells(units.rate().toString(), units.mass().toString());
-        end(
-                mass(budgets.get(NonDetects.ZERO).entries().get(index).net()),
-                mass(entry.net()),
-                mass(budgets.get(NonDetects.LIMIT).entries().get(index).net()));
+        amounts.write(entry, period);
+        end(choice -> budgets.get(choice).entries().get(index).net());
     }
 
     private void write(Plume plume, Period period, Total total, Map<NonDetects, PeriodBudget> budgets)
             throws IOException {
-        double value = budgets.get(NonDetects.HALF).totals().get(total);
         begin(plume, period, "total", total.toString(), "*");
-        if (total.isPercentage()) {
-            cells(NONE, NONE, CsvText.number(value), NONE, NONE, NONE, "%", NONE);
-            end(NONE, NONE, NONE);
-            return;
-        }
-        cells(NONE, NONE, rate(value, period), NONE, NONE, mass(value));
-        cells(units.rate().toString(), units.mass().toString());
-        end(
-                mass(budgets.get(NonDetects.ZERO).totals().get(total)),
-                mass(value),
-                mass(budgets.get(NonDetects.LIMIT).totals().get(total)));
+        amounts.write(total, budgets.get(NonDetects.HALF).totals().get(total), period);
+        end(choice ->
+                total.isPercentage() ? Double.NaN : budgets.get(choice).totals().get(total));
     }
 
     private void begin(Plume plume, Period period, String group, String item, String layer) throws IOException {
-        cells(CsvText.text(plume.prism()), CsvText.text(plume.solute().name()), CsvText.text(period.name()));
+        rows.cells(CsvText.text(plume.prism()), CsvText.text(plume.solute().name()), CsvText.text(period.name()));
         rows.span(period, times);
-        cells(group, CsvText.text(item), layer);
+        rows.cells(group, CsvText.text(item), layer);
     }
 
-    private void end(String zero, String half, String limit) throws IOException {
-        cells(zero, half, limit);
-        rows.endRow();
-    }
-
-    private void cells(String... cells) throws IOException {
-        for (String cell : cells) {
-            rows.cell(cell);
+    private void end(ToDoubleFunction<NonDetects> net) throws IOException {
+        for (NonDetects choice : NonDetects.values()) {
+            rows.cell(amounts.amount(net.applyAsDouble(choice)));
         }
-    }
-
-    private String rate(double mass, Period period) {
-        return CsvText.number(mass / period.duration() * units.rateFactor());
-    }
-
-    private String mass(double mass) {
-        return CsvText.number(mass * units.massFactor());
+        rows.endRow();
     }
 }

@@ -38,6 +38,13 @@ final class ResultTable implements AutoCloseable {
         rows.print(cell);
     }
 
+    /** Writes cells. */
+    void cells(String... cells) throws IOException {
+        for (String cell : cells) {
+            rows.print(cell);
+        }
+    }
+
     /** Writes four cells: begin and end of a period, as times and as dates where there are dates. */
     void span(Period period, Times times) throws IOException {
         rows.print(CsvText.number(period.from()));

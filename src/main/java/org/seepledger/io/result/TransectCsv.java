@@ -96,22 +96,22 @@ public final class TransectCsv {
         for (int segment = 0; segment < crossing.transect().segments(); segment++) {
             for (int layer = 0; layer < crossing.layers(); layer++) {
                 begin(crossing, period);
-                cells("segment " + (segment + 1), String.valueOf(layer + 1));
+                rows.cells("segment " + (segment + 1), String.valueOf(layer + 1));
                 int of = segment;
                 int in = layer;
                 end(choice -> crossing.panels(period, choice, of, in), Optional.of(period), unit);
             }
         }
         begin(crossing, period);
-        cells(ALL, ALL);
+        rows.cells(ALL, ALL);
         end(choice -> crossing.panels(period, choice, -1, -1), Optional.of(period), unit);
     }
 
     private void begin(Crossing crossing, Period period) throws IOException {
-        cells(
+        rows.cells(
                 CsvText.text(crossing.transect().name()),
                 CsvText.text(crossing.solute().name()));
-        cells(CsvText.text(period.name()));
+        rows.cells(CsvText.text(period.name()));
         rows.span(period, times);
     }
 
@@ -119,19 +119,19 @@ public final class TransectCsv {
         for (int panel = 0; panel < measured.names().size(); panel++) {
             int only = panel;
             begin(measured);
-            cells(CsvText.text(measured.names().get(panel)), "");
+            rows.cells(CsvText.text(measured.names().get(panel)), "");
             end(
                     choice -> measured.panels().get(choice.ordinal()).only(only),
                     Optional.empty(),
                     measured.concentration());
         }
         begin(measured);
-        cells(ALL, "");
+        rows.cells(ALL, "");
         end(choice -> measured.panels().get(choice.ordinal()), Optional.empty(), measured.concentration());
     }
 
     private void begin(MeasuredPanels measured) throws IOException {
-        cells(CsvText.text(measured.transect()), CsvText.text(measured.solute()), "", "", "", "", "");
+        rows.cells(CsvText.text(measured.transect()), CsvText.text(measured.solute()), "", "", "", "", "");
     }
 
     private interface ByChoice {
@@ -142,25 +142,19 @@ public final class TransectCsv {
         Panels shown = panels.of(NonDetects.HALF);
         double mass =
                 period.map(covered -> shown.discharge() * covered.duration()).orElse(Double.NaN);
-        cells(CsvText.number(shown.area()), CsvText.number(shown.flow()), rate(shown));
-        cells(CsvText.number(mass * units.massFactor()));
-        cells(rate(panels.of(NonDetects.ZERO)), rate(panels.of(NonDetects.LIMIT)));
-        cells(CsvText.number(shown.fluxAveraged() * MassUnits.concentrationFactor(unit, length)));
-        cells(CsvText.number(shown.areaShareFor(0.5)), CsvText.number(shown.areaShareFor(0.9)));
-        cells(
+        rows.cells(CsvText.number(shown.area()), CsvText.number(shown.flow()), rate(shown));
+        rows.cells(CsvText.number(mass * units.massFactor()));
+        rows.cells(rate(panels.of(NonDetects.ZERO)), rate(panels.of(NonDetects.LIMIT)));
+        rows.cells(CsvText.number(shown.fluxAveraged() * MassUnits.concentrationFactor(unit, length)));
+        rows.cells(CsvText.number(shown.areaShareFor(0.5)), CsvText.number(shown.areaShareFor(0.9)));
+        rows.cells(
                 units.area().toString(),
                 Measure.power(length, 3).per(times.unit()).toString());
-        cells(units.rate().toString(), units.mass().toString(), unit.toString());
+        rows.cells(units.rate().toString(), units.mass().toString(), unit.toString());
         rows.endRow();
     }
 
     private String rate(Panels panels) {
         return CsvText.number(panels.discharge() * units.rateFactor());
-    }
-
-    private void cells(String... cells) throws IOException {
-        for (String cell : cells) {
-            rows.cell(cell);
-        }
     }
 }

@@ -145,7 +145,7 @@ public final class TrendCsv {
 
     private void value(Plume plume, String quantity, double time, double value, String unit) throws IOException {
         begin(plume, quantity, "value");
-        cells(CsvText.number(time), times.isoDate(time).orElse(""), CsvText.number(value), "", "", unit, "");
+        rows.cells(CsvText.number(time), times.isoDate(time).orElse(""), CsvText.number(value), "", "", unit, "");
         rows.endRow();
     }
 
@@ -160,8 +160,8 @@ public final class TrendCsv {
             String words)
             throws IOException {
         begin(plume, quantity, kind);
-        cells("", "", CsvText.number(value));
-        cells(end(ends.map(Interval::low), factor), end(ends.map(Interval::high), factor), unit, words);
+        rows.cells("", "", CsvText.number(value));
+        rows.cells(end(ends.map(Interval::low), factor), end(ends.map(Interval::high), factor), unit, words);
         rows.endRow();
     }
 
@@ -172,12 +172,6 @@ public final class TrendCsv {
     }
 
     private void begin(Plume plume, String quantity, String kind) throws IOException {
-        cells(CsvText.text(plume.prism()), CsvText.text(plume.solute().name()), quantity, kind);
-    }
-
-    private void cells(String... cells) throws IOException {
-        for (String cell : cells) {
-            rows.cell(cell);
-        }
+        rows.cells(CsvText.text(plume.prism()), CsvText.text(plume.solute().name()), quantity, kind);
     }
 }

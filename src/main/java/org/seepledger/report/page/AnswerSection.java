@@ -16,9 +16,8 @@ import j2html.tags.DomContent;
 import java.util.ArrayList;
 import java.util.List;
 import org.seepledger.report.Answer;
-import org.seepledger.report.PrismResult;
 
-/** The answer in sentences, for each prism. */
+/** The answer in sentences, for each prism, and for each solute in it. */
 final class AnswerSection {
 
     private AnswerSection() {}
@@ -31,12 +30,26 @@ final class AnswerSection {
                         report.results().size() > 1
                                 ? TotalsTable.ofRecords(report.frame(), "All prisms", "Prism", report.lines())
                                 : text(""),
-                        each(report.results(), result -> of(report, result)))
+                        each(report.results(), result -> of(Answer.of(result, report.origins(), report.wording()))))
                 .withId("answer");
     }
 
-    private static DomContent of(Report report, PrismResult result) {
-        Answer answer = Answer.of(result, report.origins(), report.wording());
+    /** For solutes. */
+    static DomContent of(SoluteReport report) {
+        return section(
+                        h2("The answer"),
+                        p("Rates are means over the whole record, "
+                                + report.frame().span(report.record())
+                                + ". Where nothing else is said, non-detects count half their limit."),
+                        report.results().size() > 1
+                                ? TotalsTable.ofRecords(
+                                        report.frame(), "All prisms and solutes", "Solute, prism", report.lines())
+                                : text(""),
+                        each(report.results(), result -> of(Answer.of(result, report.units(), report.wording()))))
+                .withId("answer");
+    }
+
+    private static DomContent of(Answer answer) {
         List<DomContent> topics = new ArrayList<>();
         for (Answer.Topic topic : Answer.Topic.values()) {
             List<String> sentences = answer.on(topic).toList();
@@ -44,6 +57,6 @@ final class AnswerSection {
                 topics.add(div(dt(topic.question()), dd(each(sentences, sentence -> p(sentence)))));
             }
         }
-        return article(h3(result.prism()), dl(topics.toArray(DomContent[]::new)).withClass("answer"));
+        return article(h3(answer.prism()), dl(topics.toArray(DomContent[]::new)).withClass("answer"));
     }
 }

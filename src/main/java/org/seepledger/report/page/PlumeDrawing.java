@@ -165,7 +165,7 @@ public final class PlumeDrawing {
             String name = instant == located[0] || instant == located[located.length - 1]
                     ? aquifer.times().isoDate(time).orElseGet(() -> wording.number(time) + " " + aquifer.timeUnit())
                     : "";
-            stops.add(new PlumeTrack.Stop(at.x(), at.y(), at.along() / unit, at.across() / unit, at.direction(), name));
+            stops.add(PlumeTrack.Stop.of(at, unit, name));
         }
         return new PlumeTrack(stops);
     }

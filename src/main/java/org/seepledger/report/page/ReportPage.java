@@ -66,7 +66,7 @@ public final class ReportPage {
                                 : Map.of(TransectsSection.ID, "Transects")),
                 SoluteCautions.sentences(),
                 each(
-                        SoluteAnswerSection.of(report),
+                        AnswerSection.of(report),
                         each(IntStream.range(0, report.results().size())
                                 .mapToObj(plume -> PlumeSection.of(report, plume))),
                         TransectsSection.of(report),

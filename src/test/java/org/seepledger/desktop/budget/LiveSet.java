@@ -10,6 +10,7 @@ import org.seepledger.desktop.session.Opening;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.solute.LivePlume;
 import org.seepledger.desktop.solute.MassReading;
+import org.seepledger.desktop.solute.SoluteAnswersModel;
 import org.seepledger.desktop.solute.SoluteLook;
 import org.seepledger.desktop.task.DirectTasks;
 import org.seepledger.prism.Prism;
@@ -36,6 +37,9 @@ public final class LiveSet implements AutoCloseable {
 
     /** How masses are read. */
     public final MassReading masses = new MassReading(session, reading);
+
+    /** What solutes' budgets say. */
+    public final SoluteAnswersModel said = new SoluteAnswersModel(session, live, reading, plumes, masses, look);
 
     /** Where copies go. */
     public final GivenAnswers answers = new GivenAnswers();
@@ -70,7 +74,7 @@ public final class LiveSet implements AutoCloseable {
         return new LiveSet(Path.of("sample-aquifers/terrace"));
     }
 
-    /** The depot: 12 dated intervals, two prisms, a solvent and its breakdown product, non-detects. */
+    /** The depot: 24 months, two prisms, a solvent and its breakdown product, non-detects. */
     public static LiveSet depot() {
         return new LiveSet(Path.of("sample-aquifers/depot"));
     }

@@ -12,7 +12,8 @@ import org.seepledger.picture.BudgetSeries;
 class ChartModelTest {
 
     private final LiveSet valley = LiveSet.valley();
-    private final ChartModel model = new ChartModel(valley.session, valley.live, valley.reading);
+    private final ChartModel model =
+            new ChartModel(valley.session, valley.live, valley.reading, valley.plumes, valley.masses, valley.said);
 
     @AfterEach
     void close() {

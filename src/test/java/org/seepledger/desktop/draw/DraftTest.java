@@ -4,7 +4,6 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import java.io.IOException;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
@@ -13,6 +12,7 @@ import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import org.seepledger.desktop.ValleyCopy;
 import org.seepledger.desktop.map.Aim;
 import org.seepledger.desktop.map.Camera;
 import org.seepledger.desktop.map.Touch;
@@ -40,11 +40,7 @@ class DraftTest {
 
     @BeforeEach
     void open() throws IOException {
-        try (var sample = Files.list(Path.of("sample-aquifers/valley"))) {
-            for (Path file : sample.toList()) {
-                Files.copy(file, folder.resolve(file.getFileName()));
-            }
-        }
+        ValleyCopy.into(folder);
         reopen();
     }
 
@@ -334,7 +330,9 @@ class DraftTest {
         assertThat(card.topText()).isEqualTo("98.5");
         assertThat(session.selectedPrism().orElseThrow().range()).isInstanceOf(VerticalRange.Elevations.class);
         card.lids("no such.tif", "");
-        assertThat(session.status().get()).contains("no such.tif").contains("does not exist");
+        assertThat(session.notices().latest().get().orElseThrow().words())
+                .contains("no such.tif")
+                .contains("does not exist");
         card.lids("", "");
         assertThat(card.layersText()).isEmpty();
         card.reorder(1);

@@ -58,13 +58,7 @@ class SoluteLedgerTest {
         assertThat(model.rows().stream()
                         .filter(row -> row.kind() == Kind.HEADING)
                         .map(LedgerRow::label))
-                .containsExactly(
-                        "Held at the end, in kg",
-                        "Faces, with the water",
-                        "Sources",
-                        "Decay and production",
-                        "Storage",
-                        "Together");
+                .containsExactly("Held, in kg", "Advection", "Sources", "Decay, production", "Storage", "Together");
         assertThat(model.unit().get()).isEqualTo("kg/d");
         assertThat(model.belongs().get()).startsWith("breakdown product: yard");
         assertThat(model.closure().get()).startsWith("Closure error").contains("kg/d");
@@ -84,7 +78,7 @@ class SoluteLedgerTest {
         assertThat(model.rows()).noneMatch(row -> row.kind() == Kind.HELD || !Double.isNaN(row.low()));
     }
 
-    /** While dragged, from the interval alone; at rest, from the record; for a month, which takes parts of two intervals. */
+    /** While dragged, from the interval alone; at rest, from the record; for a year of several intervals. */
     @Test
     void isTheCommandsTableDigitForDigit() throws IOException {
         depot.look.dispersion().set(true);
@@ -95,8 +89,8 @@ class SoluteLedgerTest {
             depot.session.drawing().set(new Drawing(7, List.of(moved, depot.prisms.get(1)), settled));
             assertThat(copied()).containsExactlyInAnyOrderElementsOf(ofCommand("interval 5", Periods.Every.INTERVAL));
         }
-        depot.reading.every().set(Periods.Every.MONTH);
-        assertThat(copied()).containsExactlyInAnyOrderElementsOf(ofCommand("2021-10", Periods.Every.MONTH));
+        depot.reading.every().set(Periods.Every.YEAR);
+        assertThat(copied()).containsExactlyInAnyOrderElementsOf(ofCommand("2022", Periods.Every.YEAR));
     }
 
     private List<String> copied() {
@@ -106,7 +100,7 @@ class SoluteLedgerTest {
         return text.lines()
                 .map(line -> line.split("\t", -1))
                 .filter(cells -> cells.length == 7 && cells[6].equals("kg"))
-                .filter(cells -> !cells[0].equals("dissolved and sorbed"))
+                .filter(cells -> !cells[0].equals("both together"))
                 .map(cells -> String.join(" ", List.of(cells).subList(1, 6)).strip())
                 .toList();
     }

@@ -3,11 +3,14 @@ package org.seepledger.desktop.section;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import java.util.List;
+import java.util.Optional;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.picture.Body;
+import org.seepledger.picture.Section;
 import org.seepledger.sketch.Drawing;
 import org.seepledger.sketch.Lid;
 import org.seepledger.sketch.Limit;
@@ -143,6 +146,27 @@ class LidHandTest {
         assertThat(LidHand.rounded(97.2468, 0.001)).isEqualTo(97.247);
         assertThat(LidHand.rounded(1234, 100)).isEqualTo(1200);
         assertThat(LidHand.rounded(-0.26, 0.1)).isEqualTo(-0.3);
+    }
+
+    @Test
+    void whereBothLidsLieTogetherThePlaceDecides() {
+        Section cut = drawn.section();
+        Body flat = new Body("well field", List.of(new Body.Slab(0, 1000, 90, 90)));
+        Section section = new Section(
+                cut.profile(),
+                cut.layers(),
+                "m",
+                cut.span(),
+                List.of(flat),
+                List.of(),
+                0,
+                Optional.empty(),
+                cut.light());
+        LidHits hits = new LidHits(section, drawn.frame());
+        double x = drawn.frame().x(500);
+        double y = drawn.frame().y(90);
+        assertThat(hits.lidAt(x, y - 3)).contains(Lid.TOP);
+        assertThat(hits.lidAt(x, y + 3)).contains(Lid.BOTTOM);
     }
 
     @Test

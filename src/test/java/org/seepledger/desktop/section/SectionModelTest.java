@@ -141,7 +141,7 @@ class SectionModelTest {
         assertThat(drawn.frame().exaggeration()).isCloseTo(2.5, within(1e-9));
         drawn.model.resize(1200, 260);
         assertThat(drawn.frame().exaggeration()).isCloseTo(2.5, within(1e-9));
-        for (String wrong : new String[] {"0", "-1", "x", "NaN", "Infinity"}) {
+        for (String wrong : new String[] {"0", "-1", "x", "NaN", "Infinity", "1e300", "1e-9"}) {
             assertThat(drawn.model.exaggerate(wrong)).isFalse();
         }
         assertThat(drawn.session.status().get()).isEqualTo(Words.of("section.times.refused"));
@@ -158,6 +158,10 @@ class SectionModelTest {
         assertThat(drawn.frame().along(300)).isCloseTo(all.along(300), within(1e-6));
         drawn.model.drag(-40, 0);
         assertThat(drawn.frame().along(260)).isCloseTo(all.along(300), within(1e-6));
+        for (int i = 0; i < 40; i++) {
+            drawn.model.zoom(300, 100, 1e9, 1e9);
+        }
+        drawn.model.fit();
         for (int i = 0; i < 200; i++) {
             drawn.model.step(-1, -1);
         }
