@@ -3,7 +3,6 @@ package org.seepledger.intake;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
-import java.util.Map;
 import java.util.Optional;
 import java.util.function.Consumer;
 import org.seepledger.io.table.StepKind;
@@ -256,9 +255,5 @@ final class Binder {
 
     FoundTimes times() {
         return times;
-    }
-
-    Map<Wishes.Topic, String> wishes() {
-        return plan.wishes().texts();
     }
 }

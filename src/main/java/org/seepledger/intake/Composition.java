@@ -1,6 +1,7 @@
 package org.seepledger.intake;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
@@ -51,7 +52,7 @@ public record Composition(
         SetText text = new SetText(plan, grid, binder, shelf, findings::add);
         Map<String, Object> set = text.set();
         List<Finding> sorted = new ArrayList<>(findings);
-        sorted.sort(java.util.Comparator.comparing(Finding::level));
+        sorted.sort(Comparator.comparing(Finding::level));
         return new Composition(set, grid, times, layers, text.flowKind(), shelf.copies(), sorted, shelf.obstacles());
     }
 

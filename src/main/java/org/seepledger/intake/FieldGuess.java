@@ -129,7 +129,7 @@ final class FieldGuess {
         if (words.stream().anyMatch(LAYER_WORDS::contains)) {
             return Means.LAYER;
         }
-        if (words.stream().anyMatch(TIME_WORDS::contains)) {
+        if (words.stream().anyMatch(TIME_WORDS::contains) || DateText.read(text).isPresent()) {
             return Means.TIME;
         }
         if (layersKnown || role == Role.AREAL) {

@@ -59,11 +59,22 @@ final class FirstLook {
         if (name.matches(".*\\.(geojson)")) {
             return other(bytes, LooseFile.Kind.SHAPES, "");
         }
-        return other(
-                bytes,
-                LooseFile.Kind.STRANGE,
-                shownName
-                        + " is neither a GeoTIFF (.tif), nor a CSV (.csv, .txt, .tsv), nor a GeoJSON. It is left out.");
+        return other(bytes, LooseFile.Kind.STRANGE, strange(name));
+    }
+
+    private String strange(String name) {
+        String left = shownName
+                + " is neither a GeoTIFF (.tif), nor a CSV (.csv, .txt, .tsv), nor a GeoJSON. It is left out.";
+        if (name.matches(".*\\.(asc|nc|img|grd|vrt|bil|flt|adf)")) {
+            return left
+                    + " A raster of another format can be written as GeoTIFF, for instance with gdal_translate -of GTiff.";
+        }
+        if (name.matches(".*\\.(xlsx?|ods)")) {
+            return left + " Save the sheet as CSV in UTF-8.";
+        }
+        return name.matches(".*\\.(shp|gpkg|kml)")
+                ? left + " Prisms can be written as GeoJSON, for instance with ogr2ogr -f GeoJSON."
+                : left;
     }
 
     private LooseFile other(long bytes, LooseFile.Kind kind, String words) {

@@ -25,11 +25,6 @@ final class LayerNumbers {
         return counted(texts(table).map(LayerNumbers::number));
     }
 
-    /** {@return whether lines count layers from 0} */
-    static boolean fromZero(Item.Table table) {
-        return texts(table).anyMatch(text -> number(text) == 0);
-    }
-
     private static Stream<String> texts(Item.Table table) {
         int column = table.places().indexOf(Place.LAYER);
         return column < 0

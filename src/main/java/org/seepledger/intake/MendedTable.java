@@ -13,6 +13,7 @@ import java.util.stream.Stream;
 import org.seepledger.io.table.StepKind;
 import org.seepledger.io.table.TableCopy;
 import org.seepledger.io.table.TableLook;
+import org.seepledger.unit.Measure;
 
 /**
  * What becomes of a table so that an aquifer folder can read it: its headings, and cells that are counted or written
@@ -88,7 +89,7 @@ record MendedTable(List<TableCopy.Column> columns, List<String> reasons) {
 
         private static boolean known(String unit) {
             try {
-                org.seepledger.unit.Measure.of(unit);
+                Measure.of(unit);
                 return true;
             } catch (IllegalArgumentException e) {
                 return false;

@@ -61,7 +61,7 @@ final class SetText {
         if (!solutes.isEmpty()) {
             set.put("solutes", solutes);
         }
-        remark(set);
+        new SetDoubts(plan, binder, findings).on(set);
         prisms();
         return set;
     }
@@ -212,57 +212,5 @@ final class SetText {
             }
         }
         binder.joined(Binder.word(role), topic, bounds).ifPresent(json -> storage.put(key, json));
-    }
-
-    /** What a set can do without, but a person may have forgotten. */
-    private void remark(Map<String, Object> set) {
-        for (Item item : plan.items()) {
-            item.uses().stream()
-                    .filter(use -> use.role() != Role.NONE && use.guess().confidence() == Guess.Confidence.LOW)
-                    .forEach(use -> findings.accept(Finding.doubt(
-                            item,
-                            new Part(item, use).shown() + ": " + use.guess().reason())));
-            if (item instanceof Item.Other other && other.file().kind() == LooseFile.Kind.BROKEN) {
-                findings.accept(Finding.doubt(item, other.file().words() + " Until then it is left out."));
-            }
-        }
-        boolean steady = binder.times().intervals() == 1;
-        if (!steady && !set.containsKey("storage")) {
-            findings.accept(Finding.doubt(
-                    Topic.SPECIFIC_YIELD,
-                    "There is more than one interval and no storage: change in storage, residual and closure error stay"
-                            + " unknown. Bring specific yield and specific storage, or type them."));
-        }
-        if (!steady && set.get("storage") instanceof Map<?, ?> storage && !storage.containsKey("supplied")) {
-            coefficients(storage);
-        }
-        boolean headless = !set.containsKey("head") && binder.parts(Role.HEAD).isEmpty();
-        if (headless && LayerWishes.waterTables(plan, binder.layers()).contains(true)) {
-            findings.accept(Finding.doubt(
-                    Topic.HEAD,
-                    "There are no heads: water-table layers are taken as saturated to their top, and storage is unknown"
-                            + (steady ? " unless the set is steady." : ".")));
-        }
-        if (!set.containsKey("sources")) {
-            findings.accept(Finding.doubt(
-                    Topic.RECHARGE, "There is no recharge, well or other source. Is nothing added and nothing taken?"));
-        }
-    }
-
-    private void coefficients(Map<?, ?> storage) {
-        List<Boolean> waterTables = LayerWishes.waterTables(plan, binder.layers());
-        boolean elastic = storage.containsKey("specific_storage") || storage.containsKey("storativity");
-        if (waterTables.contains(true) && !storage.containsKey("specific_yield")) {
-            findings.accept(
-                    Finding.doubt(
-                            Topic.SPECIFIC_YIELD,
-                            "No specific yield is given, which layers with a water table need: change in storage stays unknown."));
-        }
-        if (waterTables.contains(false) && !elastic) {
-            findings.accept(Finding.doubt(
-                    Topic.SPECIFIC_STORAGE,
-                    "No specific storage is given, which layers without a water table need: change in storage stays"
-                            + " unknown."));
-        }
     }
 }

@@ -7,6 +7,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.function.Consumer;
 import org.seepledger.intake.Wishes.Topic;
+import org.seepledger.io.table.TableLook;
 
 /** The sources of a set, in the order in which their files stand. */
 final class SourceText {
@@ -82,6 +83,18 @@ final class SourceText {
     }
 
     private void checkDates(Item.Table table) {
+        int name = table.places().indexOf(Place.NAME);
+        boolean open = table.places().contains(Place.FROM) && !table.places().contains(Place.TO);
+        if (open && name >= 0) {
+            TableLook look = table.file().look();
+            if (look.columns().get(name).distinct().size() < look.lines()) {
+                findings.accept(Finding.fault(
+                        table,
+                        table.id()
+                                + " gives several rates of the same well and says from when each holds, not until when:"
+                                + " they would add up. Add a column \"to\"."));
+            }
+        }
         boolean dates = false;
         for (int column = 0; column < table.places().size(); column++) {
             Place place = table.places().get(column);

@@ -57,11 +57,23 @@ record Steps(List<String> texts, List<LocalDate> days, boolean months, List<Doub
         if (rasters.bands() != Means.TIME) {
             return Optional.empty();
         }
+        return Optional.of(ofBands(rasters));
+    }
+
+    /** Bands that are described by dates tell days; others are counted. */
+    private static Steps ofBands(Item.Rasters rasters) {
         List<String> texts = new ArrayList<>();
-        for (int band = 1; band <= rasters.bandCount(); band++) {
-            texts.add("band " + band);
+        List<LocalDate> days = new ArrayList<>();
+        boolean months = true;
+        for (int band = 0; band < rasters.bandCount(); band++) {
+            String text = rasters.files().get(0).bands().get(band).description();
+            DateText.read(text).ifPresent(date -> days.add(date.toLocalDate()));
+            months &= text.length() <= 7;
+            texts.add("band " + (band + 1));
         }
-        return Optional.of(new Steps(texts, List.of(), false, List.of(), false));
+        boolean dated =
+                days.size() == texts.size() && days.stream().sorted().toList().equals(days);
+        return new Steps(texts, dated ? days : List.of(), months, List.of(), false);
     }
 
     private static Optional<Steps> ofTable(Item.Table table) {

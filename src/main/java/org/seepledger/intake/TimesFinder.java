@@ -4,6 +4,7 @@ import java.time.LocalDate;
 import java.time.temporal.ChronoUnit;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.function.Consumer;
 import java.util.regex.Matcher;
@@ -103,7 +104,7 @@ final class TimesFinder {
 
     /** {@code monthly}, {@code yearly}, {@code daily}, {@code every 10}. */
     private Optional<FoundTimes> spoken(int count, boolean skip) {
-        String said = plan.wishes().of(Topic.TIMES).toLowerCase(java.util.Locale.ROOT);
+        String said = plan.wishes().of(Topic.TIMES).toLowerCase(Locale.ROOT);
         Matcher every = EVERY.matcher(said);
         List<Double> instants = new ArrayList<>();
         if (every.matches()) {

@@ -20,8 +20,10 @@ public record HandoverOutcome(
         files = List.copyOf(files);
     }
 
-    /** {@return the report of the water budget, if there is one} */
+    /** {@return the report of the water budget, else of the solutes, if there is one} */
     public Optional<Path> report() {
-        return balance.map(done -> out.resolve(HandoverRequest.BUDGET).resolve("report.html"));
+        return balance.map(done -> HandoverRequest.BUDGET)
+                .or(() -> plume.map(done -> HandoverRequest.SOLUTES))
+                .map(folder -> out.resolve(folder).resolve("report.html"));
     }
 }

@@ -24,7 +24,7 @@ record RowNumber(BudgetRow row, TracedRow traced, double net, double gross) {
     static final double AGREES = 1e-9;
 
     /** What rounding of the terms may add to that, as a share of the sum of their magnitudes. */
-    private static final double ROUNDING = 1e-14;
+    static final double ROUNDING = 1e-14;
 
     /**
      * {@return what a row comes to}

@@ -17,6 +17,7 @@ import org.seepledger.aquifer.Saturation;
 import org.seepledger.aquifer.Solute;
 import org.seepledger.aquifer.Window;
 import org.seepledger.balance.Span;
+import org.seepledger.balance.Trace;
 import org.seepledger.balance.WellRule;
 import org.seepledger.io.aquifer.AquiferFolder;
 import org.seepledger.io.prisms.PrismsReader;
@@ -24,6 +25,7 @@ import org.seepledger.io.prisms.TransectsReader;
 import org.seepledger.io.prisms.TransectsWriter;
 import org.seepledger.io.result.MassUnits;
 import org.seepledger.io.table.MeasuredPanels;
+import org.seepledger.ledger.Period;
 import org.seepledger.picture.Drape;
 import org.seepledger.picture.ThresholdOutline;
 import org.seepledger.plume.Crossing;
@@ -124,6 +126,52 @@ public final class SoluteBench {
 
     private double area(Prism prism) {
         return PrismCut.of(prism, aquifer().grid()).area();
+    }
+
+    /**
+     * Traces a row of a solute's budget of a prism to the stored concentrations that it rests on.
+     *
+     * @param prism the prism; what lies beyond the grid is cut off
+     * @param solute the solute's name
+     * @param row the row, as {@code PRISM/PERIOD/GROUP/ITEM/LAYER}
+     * @param periods the periods that one of is named
+     * @param choice how solutes are balanced
+     * @param units the units of results
+     * @param most how many values are kept, those that contribute the most
+     * @param progress told how far the work is
+     * @return the number and its values
+     * @throws org.seepledger.fault.UsageFault if there is no such row, or it has no weights
+     * @throws org.seepledger.fault.DataFault if the data are wrong
+     * @throws org.seepledger.progress.Cancelled if the work was stopped
+     */
+    public TracedNumber trace(
+            Prism prism,
+            String solute,
+            String row,
+            List<Period> periods,
+            Choice choice,
+            MassUnits units,
+            int most,
+            Progress progress) {
+        return gate.ask(progress, until -> {
+            Prism admitted = readers.apply(new ArrayList<>()).admitted(prism);
+            SoluteRow named = SoluteRow.of(
+                    new SoluteRow.Budget(aquifer(), solutes, solute, options(choice, Workbench.threads()), units),
+                    row,
+                    List.of(admitted),
+                    periods,
+                    until);
+            LargestLines lines = new LargestLines(most);
+            Trace.Sum sum = named.trace(lines, until);
+            return new TracedNumber(
+                    row,
+                    named.period(),
+                    named.net(),
+                    TracedNumber.Units.of(units),
+                    sum.value(),
+                    sum.lines(),
+                    lines.lines());
+        });
     }
 
     /**

@@ -353,7 +353,14 @@ public final class Workbench implements AutoCloseable {
                     lines,
                     until);
             number.mustBe(sum);
-            return new TracedNumber(row, named.period(), number.net(), units, sum.value(), sum.lines(), lines.lines());
+            return new TracedNumber(
+                    row,
+                    named.period(),
+                    number.net(),
+                    TracedNumber.Units.of(units),
+                    sum.value(),
+                    sum.lines(),
+                    lines.lines());
         });
     }
 

@@ -15,6 +15,8 @@ final class SectionDrawing {
     /** The room beside the frame, for the layers' names. */
     static final double RIGHT = 116;
 
+    private static final double HINT = 0.3;
+
     private static final double SMALL = SectionSheet.SMALL;
     private static final double LID_REACH = 12;
     private static final double LID_WIDTH = 5;
@@ -79,8 +81,9 @@ final class SectionDrawing {
                 : Optional.empty();
     }
 
-    private static Fill fill(double opacity) {
-        return new Fill(Ink.Token.PRISM, opacity, Texture.RISING);
+    /** Over colours, which have a meaning, a body is but hinted at. */
+    private Fill fill(double opacity) {
+        return new Fill(Ink.Token.PRISM, section.colours().isPresent() ? HINT * opacity : opacity, Texture.RISING);
     }
 
     private String description() {

@@ -158,9 +158,16 @@ class HandoverTest {
         click("#handover-dispersion");
         write("#handover-above", "0.1 mg/L");
         write("#handover-massrate", "kg/yr");
+        write("#handover-transects", set.resolve("transects.geojson").toString());
+        click("#handover-water");
         Path out = folder.resolve("handed");
         handOver(out);
         assertSame(out, shown("#handover-commands"));
-        assertThat(shown("#handover-commands")).contains(set.toString().replace("'", "'\\''") + "/prisms.geojson");
+        window.robot.clickOn("#handover-open-report");
+        assertThat(window.answers.opened).containsExactly(out.resolve("solutes/report.html"));
+        assertThat(out.resolve("solutes/transect.csv")).exists();
+        assertThat(shown("#handover-commands"))
+                .doesNotContain("balance")
+                .contains(set.toString().replace("'", "'\\''") + "/prisms.geojson");
     }
 }

@@ -7,7 +7,6 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Optional;
-import javafx.geometry.Bounds;
 import javafx.geometry.Point2D;
 import javafx.scene.Node;
 import javafx.scene.control.Label;
@@ -18,7 +17,6 @@ import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.seepledger.desktop.ledger.Arrangement;
-import org.seepledger.desktop.map.Camera;
 import org.seepledger.picture.Body;
 import org.seepledger.picture.Section;
 import org.seepledger.picture.SectionFrame;
@@ -37,11 +35,7 @@ class SectionWindowTest {
 
     @BeforeEach
     void open() throws IOException {
-        try (var sample = Files.list(Path.of("sample-aquifers/valley"))) {
-            for (Path file : sample.toList()) {
-                Files.copy(file, folder.resolve(file.getFileName()));
-            }
-        }
+        OpenWindow.copy(Path.of("sample-aquifers/valley"), folder);
         window = new OpenWindow(1600, 1000);
         window.openSet(folder);
         window.await(() -> window.assembly().map().values().scale().get().isPresent());
@@ -53,16 +47,6 @@ class SectionWindowTest {
         window.close();
     }
 
-    private static Point2D origin(Node node) {
-        Bounds bounds = node.localToScreen(node.getBoundsInLocal());
-        return new Point2D(bounds.getMinX(), bounds.getMinY());
-    }
-
-    private Point2D onMap(double mapX, double mapY) {
-        Camera camera = window.assembly().map().camera().get();
-        return origin(window.robot.lookup("#map-canvas").query()).add(camera.x(mapX), camera.y(mapY));
-    }
-
     private Section section() {
         return window.assembly().session().section().get().orElseThrow();
     }
@@ -72,7 +56,8 @@ class SectionWindowTest {
     }
 
     private Point2D inSection(double along, double elevation) {
-        return origin(window.robot.lookup("#section-canvas").query()).add(frame().x(along), frame().y(elevation));
+        Node canvas = window.robot.lookup("#section-canvas").query();
+        return canvas.localToScreen(frame().x(along), frame().y(elevation));
     }
 
     private Body.Spot spot() {
@@ -80,7 +65,7 @@ class SectionWindowTest {
     }
 
     private void type(KeyCode... keys) {
-        window.robot.press(keys).release(keys);
+        window.type(keys);
     }
 
     private Drawing drawing() {
@@ -93,9 +78,9 @@ class SectionWindowTest {
 
     private void drawLine() {
         type(KeyCode.A);
-        window.robot.clickOn(onMap(500300, 5201350));
-        window.robot.clickOn(onMap(501300, 5201500));
-        window.robot.doubleClickOn(onMap(502800, 5200950));
+        window.robot.clickOn(window.onMap(500300, 5201350));
+        window.robot.clickOn(window.onMap(501300, 5201500));
+        window.robot.doubleClickOn(window.onMap(502800, 5200950));
         window.await(() -> window.assembly().section().frame().get().isPresent()
                 && section().body().isPresent());
         window.settle();
@@ -233,9 +218,9 @@ class SectionWindowTest {
                 .contains("from A")
                 .contains("elevation")
                 .contains("head");
-        window.robot.moveTo(onMap(500300, 5201350));
+        window.robot.moveTo(window.onMap(500300, 5201350));
         assertThat(window.assembly().session().along().get().orElseThrow()).isCloseTo(0, within(40.0));
-        window.robot.moveTo(onMap(500300, 5200350));
+        window.robot.moveTo(window.onMap(500300, 5200350));
         assertThat(window.assembly().session().along().get()).isEmpty();
     }
 }

@@ -2,6 +2,8 @@ package org.seepledger.intake;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.io.IOException;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Map;
@@ -314,5 +316,53 @@ class CompositionTest {
                 .doesNotContain("name=Bedrock");
         Composition said = Composition.of(LooseFolder.said(loose.plan(), Topic.LAYERS, "Sand, Silt, Rock"), false);
         assertThat(said.set().get("layers").toString()).contains("name=Sand", "name=Silt", "name=Rock");
+    }
+
+    @Test
+    void ratesOfAWellThatWouldAddUpAreRefused() {
+        Plan plan = oneLayer()
+                .text(
+                        "wells.csv",
+                        "name,x,y,layer,date,rate",
+                        "W,1015,2015,1,2021-10-01,-5",
+                        "W,1015,2015,1,2021-11-01,-6")
+                .plan();
+        assertThat(faults(Composition.of(LooseFolder.said(plan, Topic.START, "2021-10-01"), false)))
+                .singleElement()
+                .asString()
+                .contains("they would add up");
+    }
+
+    @Test
+    void filesOfOtherKindsAreLeftOutWithWhatToDo() {
+        Plan plan = oneLayer()
+                .text("dem.asc", "ncols 4")
+                .text("wells.xlsx", "PK")
+                .text("zones.shp", "x")
+                .text("cells.txt", "x y head", "1 2 3")
+                .plan();
+        assertThat(((Item.Other) LooseFolder.item(plan, "dem.asc")).file().words())
+                .contains("gdal_translate");
+        assertThat(((Item.Other) LooseFolder.item(plan, "xlsx")).file().words()).contains("Save the sheet as CSV");
+        assertThat(((Item.Other) LooseFolder.item(plan, "shp")).file().words()).contains("ogr2ogr");
+        assertThat(Composition.of(plan, false).findings())
+                .extracting(Finding::words)
+                .anyMatch(words -> words.contains("cells.txt has a single column"));
+    }
+
+    @Test
+    void anEmptyFileAndGarbageAreSaidAndDoNotStopTheRest() throws IOException {
+        Files.createFile(folder.resolve("void.csv"));
+        Plan plan = oneLayer()
+                .text("noise.tif", "no raster")
+                .text("ragged.csv", "x,y,head", "1,2")
+                .plan();
+        Composition composition = Composition.of(plan, false);
+        assertThat(composition.isSound()).isTrue();
+        assertThat(composition.findings())
+                .extracting(Finding::words)
+                .anyMatch(words -> words.startsWith("noise.tif") && words.endsWith("left out."))
+                .anyMatch(words -> words.startsWith("void.csv is empty"))
+                .anyMatch(words -> words.startsWith("ragged.csv, line 2"));
     }
 }

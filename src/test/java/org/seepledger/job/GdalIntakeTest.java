@@ -102,4 +102,33 @@ class GdalIntakeTest {
         BalanceJob.run(Requests.byInterval(set, VALLEY.resolve("prisms.geojson"), out), Progress.NONE);
         return Rows.text(out.resolve("budget.csv"));
     }
+
+    @Test
+    void descriptionsOfBandsSayWhatTheyAre() throws IOException, InterruptedException {
+        List<String> described = List.of("ground surface", "base of gravel", "hydraulic conductivity", "head");
+        List<String> names = List.of("loam_base.tif", "rock.tif", "conductivity_l1.tif", "head_l1_0.tif");
+        Path stack = folder.resolve("stack.vrt");
+        List<String> build = new ArrayList<>(List.of("gdalbuildvrt", "-q", "-separate", stack.toString()));
+        names.forEach(name -> build.add(VALLEY.resolve(name).toAbsolutePath().toString()));
+        run(build);
+        String vrt = Files.readString(stack);
+        for (int band = 1; band <= described.size(); band++) {
+            String begin = "band=\"" + band + "\">";
+            vrt = vrt.replace(begin, begin + "<Description>" + described.get(band - 1) + "</Description>");
+        }
+        Files.writeString(stack, vrt);
+        Path loose = Files.createDirectories(folder.resolve("loose"));
+        run(List.of(
+                "gdal_translate",
+                "-q",
+                stack.toString(),
+                loose.resolve("all.tif").toString()));
+        Plan plan = Proposal.of(IntakeJob.look(List.of(loose), Progress.NONE));
+        assertThat(plan.items().get(0).uses())
+                .extracting(use -> use.role().name())
+                .containsExactly("TOP", "BOTTOM", "CONDUCTIVITY", "HEAD");
+        Composition composition = Composition.of(plan, false);
+        assertThat(composition.isSound()).isTrue();
+        assertThat(IntakeJob.check(composition, 2, Progress.NONE).text()).contains("heads and hydraulic conductivity");
+    }
 }

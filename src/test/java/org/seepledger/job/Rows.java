@@ -11,11 +11,12 @@ import org.apache.commons.csv.CSVParser;
 import org.apache.commons.csv.CSVRecord;
 
 /** Reads tables that the program wrote with another reader than its own. */
-final class Rows {
+public final class Rows {
 
     private Rows() {}
 
-    static List<CSVRecord> of(Path file) throws IOException {
+    /** The rows of a table below its notes. */
+    public static List<CSVRecord> of(Path file) throws IOException {
         CSVFormat format = CSVFormat.RFC4180
                 .builder()
                 .setHeader()

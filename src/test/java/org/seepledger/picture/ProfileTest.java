@@ -26,13 +26,13 @@ import org.seepledger.sketch.Refusal;
 
 class ProfileTest {
 
-    private static SectionLine line(double... xy) {
+    static SectionLine line(double... xy) {
         return new SectionLine(IntStream.range(0, xy.length / 2)
                 .mapToObj(i -> new Place(xy[2 * i], xy[2 * i + 1]))
                 .toList());
     }
 
-    private static Profile profile(SectionLine line, Aquifer aquifer) {
+    static Profile profile(SectionLine line, Aquifer aquifer) {
         return Profile.along(line, aquifer, 0, 1, Optional.empty(), Progress.NONE);
     }
 

@@ -2,12 +2,13 @@ package org.seepledger.picture;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
+import static org.seepledger.picture.ProfileTest.line;
+import static org.seepledger.picture.ProfileTest.profile;
 
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Random;
-import java.util.stream.IntStream;
 import net.jqwik.api.ForAll;
 import net.jqwik.api.Property;
 import org.junit.jupiter.api.Test;
@@ -32,16 +33,6 @@ class SectionPictureTest {
         return body.slabs().stream()
                 .mapToDouble(slab -> slab.to() - slab.from())
                 .sum();
-    }
-
-    private static SectionLine line(double... xy) {
-        return new SectionLine(IntStream.range(0, xy.length / 2)
-                .mapToObj(i -> new Place(xy[2 * i], xy[2 * i + 1]))
-                .toList());
-    }
-
-    private static Profile profile(SectionLine line, Aquifer aquifer) {
-        return Profile.along(line, aquifer, 0, 1, Optional.empty(), Progress.NONE);
     }
 
     private static Body body(SectionLine line, Prism prism) {

@@ -20,7 +20,7 @@ import org.seepledger.picture.Picture;
 /** The chart, and for above it the slider of the interval looked at; a click or drag on the chart moves it too. */
 public final class ChartView extends BorderPane {
 
-    private static final double LEAST_HEIGHT = 196;
+    private static final double LEAST_HEIGHT = 158;
     private static final double TREND_WIDTH = 340;
 
     private final ChartModel model;

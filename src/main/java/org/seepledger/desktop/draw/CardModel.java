@@ -127,7 +127,7 @@ final class CardModel {
         Optional<Shape> shape = model.selected();
         OptionalDouble distance = number(text);
         if (shape.isEmpty() || distance.isEmpty()) {
-            model.session().status().set(Words.of(shape.isEmpty() ? "tool.needs" : "buffer.number"));
+            model.refuse(Words.of(shape.isEmpty() ? "tool.needs" : "buffer.number"));
             return false;
         }
         String name =

@@ -45,7 +45,9 @@ public final class LidSurfaces {
                         .ifPresent(file -> inside(set, file)
                                 .ifPresentOrElse(
                                         then,
-                                        () -> model.session().status().set(Words.of("surface.outside", set.path())))));
+                                        () -> model.session()
+                                                .notices()
+                                                .refuse(Words.of("surface.outside", set.path())))));
     }
 
     private static Optional<String> inside(OpenSet set, Path file) {
@@ -56,7 +58,7 @@ public final class LidSurfaces {
                 : Optional.empty();
     }
 
-    /** Reads a surface and goes on once it is known; what is wrong with it is said in the status line. */
+    /** Reads a surface and goes on once it is known; what is wrong with it is said as a notice. */
     void read(Limit.Surface surface, Runnable then) {
         model.session()
                 .set()
@@ -70,6 +72,6 @@ public final class LidSurfaces {
                             model.know(Map.of(surface, values));
                             then.run();
                         },
-                        fault -> model.session().status().set(FaultWords.of(fault))));
+                        fault -> model.session().notices().refuse(FaultWords.of(fault))));
     }
 }

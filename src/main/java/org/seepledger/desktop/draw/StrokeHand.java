@@ -99,7 +99,7 @@ final class StrokeHand {
             model.session().sectionLine().set(Optional.of(line));
             return true;
         } catch (Refusal refusal) {
-            model.session().status().set(refusal.getMessage());
+            model.refuse(refusal.getMessage());
             return false;
         }
     }

@@ -96,7 +96,7 @@ public final class Folio {
         add("folio.exchange", new ExchangeView(new ExchangeModel(session, live, reading, copies), theme));
         // Before the model, which takes the question away.
         session.asked().addListener((asked, before, after) -> after.ifPresent(row -> open(ORIGIN)));
-        add("folio.origin", new OriginView(new OriginModel(session, reading, tasks, dialogs, copies)));
+        add("folio.origin", new OriginView(new OriginModel(session, reading, masses, look, tasks, dialogs, copies)));
         this.transectsMark = add("folio.transects", new TransectView(transects));
         ofSolutes(transectsMark, transects.open());
         SolutePanelModel panel = new SolutePanelModel(session, look, plumes);

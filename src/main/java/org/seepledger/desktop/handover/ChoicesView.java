@@ -7,7 +7,7 @@ import java.util.Locale;
 import java.util.stream.IntStream;
 import javafx.beans.binding.Bindings;
 import javafx.beans.binding.BooleanBinding;
-import javafx.beans.property.BooleanProperty;
+import javafx.beans.value.ObservableBooleanValue;
 import javafx.scene.Node;
 import javafx.scene.control.ChoiceBox;
 import javafx.scene.control.TextField;
@@ -35,7 +35,7 @@ final class ChoicesView extends VBox {
     }
 
     /** Shows a form only while it matters. */
-    private static void open(Node form, BooleanProperty wanted) {
+    private static void open(Node form, ObservableBooleanValue wanted) {
         form.visibleProperty().bind(wanted);
         form.managedProperty().bind(wanted);
     }
@@ -88,7 +88,7 @@ final class ChoicesView extends VBox {
         fields.text("date", report.date());
         fields.choice("tables", List.of(ReportChoices.Tables.values()), ChoicesView::words, report.tables());
         fields.choice("amounts", List.of(Amounts.values()), ChoicesView::words, report.amounts());
-        open(fields, choices.water());
+        open(fields, choices.water().or(choices.plume()));
         return fields;
     }
 
@@ -99,6 +99,8 @@ final class ChoicesView extends VBox {
         fields.text("mass", solutes.massUnit());
         TextField above = fields.text("above", solutes.above());
         above.setPrefColumnCount(12);
+        fields.path("transects", solutes.transects(), solutes.transects().problem(), model::chooseTransects);
+        fields.path("panels", solutes.panels(), solutes.panels().problem(), model::choosePanels);
         fields.check("dispersion", solutes.dispersion());
         return fields;
     }

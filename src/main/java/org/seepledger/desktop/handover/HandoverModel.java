@@ -39,6 +39,7 @@ import org.seepledger.unit.Figures;
 /** Handing over the prisms that are drawn: what is chosen, what is wrong with it, how far it is, what came of it. */
 public final class HandoverModel {
 
+    private static final FileDialogs.Kind CSV = new FileDialogs.Kind("CSV", "*.csv");
     private static final Duration REST = Duration.ofMillis(200);
 
     private final Session session;
@@ -268,9 +269,22 @@ public final class HandoverModel {
                 .ifPresent(folder -> choices.out().text().set(folder.toString()));
     }
 
+    /** Asks for a file of transects. */
+    public void chooseTransects() {
+        FileDialogs.Kind lines = new FileDialogs.Kind("GeoJSON", "*.geojson");
+        dialogs.fileToRead(Words.of("handover.transects.title"), lines)
+                .ifPresent(file -> choices.solutes().transects().text().set(file.toString()));
+    }
+
+    /** Asks for a file of measured panels. */
+    public void choosePanels() {
+        dialogs.fileToRead(Words.of("handover.panels.title"), CSV)
+                .ifPresent(file -> choices.solutes().panels().text().set(file.toString()));
+    }
+
     /** Asks for a file of periods. */
     public void choosePeriods() {
-        dialogs.fileToRead(Words.of("handover.periods.title"), new FileDialogs.Kind("CSV", "*.csv"))
+        dialogs.fileToRead(Words.of("handover.periods.title"), CSV)
                 .ifPresent(file -> choices.budget().periods().text().set(file.toString()));
     }
 

@@ -190,6 +190,7 @@ public final class HandoverPage extends BorderPane {
     private void showAdvance() {
         String what = model.doing();
         doing.setText(what.isEmpty() ? Words.of("budget.working") : Words.of("handover.doing", what));
-        bar.setProgress(what.isEmpty() ? ProgressBar.INDETERMINATE_PROGRESS : model.share());
+        boolean known = !what.isEmpty() && model.share() < 1;
+        bar.setProgress(known ? model.share() : ProgressBar.INDETERMINATE_PROGRESS);
     }
 }

@@ -1,5 +1,6 @@
 package org.seepledger.desktop.handover;
 
+import java.nio.file.Path;
 import java.util.List;
 import javafx.beans.property.BooleanProperty;
 import javafx.beans.property.SimpleBooleanProperty;
@@ -14,6 +15,8 @@ public final class SoluteChoices {
     private final Entry<Measure> rateUnit = new Entry<>(Meaning.unit("kg/d"));
     private final Entry<Measure> massUnit = new Entry<>(Meaning.unit("kg"));
     private final Entry<PlumeRequest.Threshold> above = new Entry<>(Meaning::concentration);
+    private final Entry<Path> transects = new Entry<>(Meaning::path);
+    private final Entry<Path> panels = new Entry<>(Meaning::path);
     private final BooleanProperty dispersion = new SimpleBooleanProperty();
 
     SoluteChoices() {}
@@ -33,23 +36,35 @@ public final class SoluteChoices {
         return above;
     }
 
+    /** {@return a file of lines; what crosses them is counted} */
+    public Entry<Path> transects() {
+        return transects;
+    }
+
+    /** {@return a file of measured panels of transects} */
+    public Entry<Path> panels() {
+        return panels;
+    }
+
     /** {@return whether dispersion is booked} */
     public BooleanProperty dispersion() {
         return dispersion;
     }
 
     List<ObservableValue<?>> observables() {
-        return List.of(rateUnit.text(), massUnit.text(), above.text(), dispersion);
+        return List.of(rateUnit.text(), massUnit.text(), above.text(), transects.text(), panels.text(), dispersion);
     }
 
     List<Entry<?>> entries() {
-        return List.of(rateUnit, massUnit, above);
+        return List.of(rateUnit, massUnit, above, transects, panels);
     }
 
     CommandText into(CommandText command) {
         return command.with("--rate-unit", rateUnit.value())
                 .with("--mass-unit", massUnit.value())
                 .flag("--dispersion", dispersion.get())
-                .with("--above", above.value().map(limit -> limit.value() + " " + limit.unit()));
+                .with("--above", above.value().map(limit -> limit.value() + " " + limit.unit()))
+                .with("--transects", transects.value())
+                .with("--panels", panels.value());
     }
 }

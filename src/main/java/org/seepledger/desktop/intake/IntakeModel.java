@@ -1,6 +1,5 @@
 package org.seepledger.desktop.intake;
 
-import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.time.Duration;
 import java.util.ArrayList;
@@ -9,7 +8,6 @@ import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
-import java.util.function.BiConsumer;
 import java.util.function.Consumer;
 import java.util.function.UnaryOperator;
 import javafx.beans.property.BooleanProperty;
@@ -18,8 +16,6 @@ import javafx.beans.property.ReadOnlyObjectProperty;
 import javafx.beans.property.ReadOnlyObjectWrapper;
 import javafx.beans.property.SimpleBooleanProperty;
 import javafx.beans.property.SimpleIntegerProperty;
-import javafx.beans.property.SimpleStringProperty;
-import javafx.beans.property.StringProperty;
 import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.task.EntryGuard;
 import org.seepledger.desktop.task.Lane;
@@ -38,7 +34,6 @@ import org.seepledger.job.Inspection;
 import org.seepledger.job.IntakeJob;
 import org.seepledger.job.RasterPreview;
 import org.seepledger.progress.Cancelled;
-import org.seepledger.progress.Progress;
 
 /** Loose files, what they are taken for, and the aquifer folder that they make. */
 public final class IntakeModel {
@@ -50,19 +45,17 @@ public final class IntakeModel {
     private final Lane looking;
     private final Lane making;
     private final Lane checking;
-    private final Lane writing;
+    private final WritingModel writing;
     private final Lane previewing;
     private final Set<Path> brought = new LinkedHashSet<>();
     private final Set<Path> leftOut = new HashSet<>();
     private final BooleanProperty shown = new SimpleBooleanProperty();
     private final IntegerProperty chosen = new SimpleIntegerProperty(-1);
-    private final StringProperty target = new SimpleStringProperty("");
     private final ReadOnlyObjectWrapper<Optional<Plan>> plan = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final ReadOnlyObjectWrapper<Optional<Made>> made = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final ReadOnlyObjectWrapper<PaneState> state =
             new ReadOnlyObjectWrapper<>(PaneState.empty(Words.of("intake.empty")));
     private final ReadOnlyObjectWrapper<Check> check = new ReadOnlyObjectWrapper<>(Check.NONE);
-    private final ReadOnlyObjectWrapper<PaneState> written = new ReadOnlyObjectWrapper<>(PaneState.READY);
 
     /**
      * What the check says.
@@ -88,7 +81,7 @@ public final class IntakeModel {
         this.looking = tasks.latest("task.intake.looking");
         this.making = tasks.latest("task.intake.making");
         this.checking = tasks.latest("task.intake.checking");
-        this.writing = tasks.latest("task.intake.writing");
+        this.writing = new WritingModel(tasks, dialogs, this::leaveTo);
         this.previewing = tasks.latest("task.intake.preview");
     }
 
@@ -117,19 +110,9 @@ public final class IntakeModel {
         return check.getReadOnlyProperty();
     }
 
-    /** {@return how the writing stands} */
-    ReadOnlyObjectProperty<PaneState> written() {
-        return written.getReadOnlyProperty();
-    }
-
     /** {@return which item is looked at, from 0; −1 for the set as a whole} */
     IntegerProperty chosen() {
         return chosen;
-    }
-
-    /** {@return where the new folder is to be} */
-    StringProperty target() {
-        return target;
     }
 
     /** Asks for files and adds them. */
@@ -155,7 +138,7 @@ public final class IntakeModel {
         plan.set(Optional.empty());
         made.set(Optional.empty());
         check.set(Check.NONE);
-        written.set(PaneState.READY);
+        writing.forget();
         state.set(PaneState.empty(Words.of("intake.empty")));
     }
 
@@ -190,22 +173,16 @@ public final class IntakeModel {
     private void found(Plan looked) {
         Plan merged = plan.get().map(before -> Corrections.kept(before, looked)).orElse(looked);
         state.set(merged.items().isEmpty() ? PaneState.empty(Words.of("intake.nothing")) : PaneState.READY);
-        if (target.get().isEmpty() || plan.get().isEmpty()) {
-            target.set(free(looked.root()).toString());
+        if (plan.get().isEmpty()) {
+            writing.suggest(looked.root());
         }
         chosen.set(-1);
         take(merged);
     }
 
-    /** A folder beside the one that holds the files. */
-    private static Path free(Path root) {
-        Path name = root.getFileName();
-        return name == null ? root.resolve("aquifer") : root.resolveSibling(name + "-aquifer");
-    }
-
     private void take(Plan next) {
         plan.set(Optional.of(next));
-        written.set(PaneState.READY);
+        writing.forget();
         checking.cancel();
         making.runAfter(
                 REST,
@@ -327,75 +304,29 @@ public final class IntakeModel {
                     return RasterPreview.of(file.path(), file.shownName(), band, progress);
                 },
                 done,
-                fault -> written.set(PaneState.failed(FaultWords.of(fault))));
-    }
-
-    /** Asks for a folder in which the new one is to be. */
-    void chooseTarget() {
-        Path name = targetFolder().map(Path::getFileName).orElse(Path.of("aquifer"));
-        dialogs.folder(Words.of("intake.target"))
-                .ifPresent(folder -> target.set(folder.resolve(name).toString()));
-    }
-
-    /** Where the new folder is to be, if that can be the name of a folder. */
-    private Optional<Path> targetFolder() {
-        try {
-            Path path = Path.of(target.get().strip());
-            boolean named = path.getFileName() != null && !path.toString().isEmpty();
-            return named ? Optional.of(path.toAbsolutePath().normalize()) : Optional.empty();
-        } catch (InvalidPathException e) {
-            return Optional.empty();
-        }
+                writing::fail);
     }
 
     /** Writes the new folder and opens it. */
     void write() {
-        Optional<Path> wanted = targetFolder();
-        if (wanted.isEmpty()) {
-            written.set(PaneState.failed(Words.of("intake.target.none")));
-            return;
-        }
-        Path folder = wanted.get();
-        made.get()
-                .filter(now -> now.copied().isSound())
-                .ifPresent(now -> write(
-                        Words.of("intake.writing", folder),
-                        folder,
-                        (threads, progress) -> IntakeJob.write(now.copied(), folder, threads, progress)));
+        made.get().map(Made::copied).filter(Composition::isSound).ifPresent(writing::write);
     }
 
     /** Writes the description of files where they lie, and opens their folder. */
     void describe() {
-        made.get().filter(now -> now.placed().isSound()).ifPresent(now -> {
-            Path root = now.plan().root();
-            write(
-                    Words.of("intake.writing", root),
-                    root,
-                    (threads, progress) -> IntakeJob.describe(now.placed(), root, threads, progress));
-        });
+        made.get()
+                .filter(now -> now.placed().isSound())
+                .ifPresent(now -> writing.describe(now.placed(), now.plan().root()));
     }
 
-    private void write(String words, Path folder, BiConsumer<Integer, Progress> work) {
-        written.set(PaneState.working(words));
-        int threads = Math.max(1, Runtime.getRuntime().availableProcessors() - 1);
-        writing.run(
-                progress -> {
-                    EntryGuard.enter();
-                    work.accept(threads, progress);
-                    return folder;
-                },
-                done -> {
-                    written.set(PaneState.READY);
-                    shown.set(false);
-                    clear();
-                    open.accept(done);
-                },
-                fault -> written.set(isStopped(fault) ? PaneState.READY : PaneState.failed(FaultWords.of(fault))));
+    /** {@return the writing: where to, and how it stands} */
+    WritingModel writing() {
+        return writing;
     }
 
-    /** Ends the writing; nothing is left of it. */
-    void cancel() {
-        writing.cancel();
-        written.set(PaneState.READY);
+    private void leaveTo(Path folder) {
+        shown.set(false);
+        clear();
+        open.accept(folder);
     }
 }

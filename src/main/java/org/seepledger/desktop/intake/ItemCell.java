@@ -1,5 +1,6 @@
 package org.seepledger.desktop.intake;
 
+import java.util.Locale;
 import javafx.scene.control.Label;
 import javafx.scene.control.ListCell;
 import javafx.scene.control.OverrunStyle;
@@ -41,7 +42,7 @@ final class ItemCell extends ListCell<ItemRow> {
                 title.getStyleClass().add("sl-strong");
             }
             mark.getStyleClass().removeAll("fault", "doubt", "fine", "unused");
-            String name = row.mark().name().toLowerCase(java.util.Locale.ROOT);
+            String name = row.mark().name().toLowerCase(Locale.ROOT);
             mark.getStyleClass().add(name);
             mark.setText(Words.of("intake.mark." + name));
             line.setOpacity(row.mark() == ItemRow.Mark.UNUSED ? 0.6 : 1);

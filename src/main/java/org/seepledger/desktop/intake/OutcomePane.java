@@ -56,23 +56,23 @@ final class OutcomePane extends VBox {
         getChildren().addAll(Form.heading("intake.heading.outcome"), verdict, scroll, writing());
         model.made().addListener((now, before, after) -> show());
         model.check().addListener((now, before, after) -> show());
-        model.written().addListener((now, before, after) -> show());
+        model.writing().state().addListener((now, before, after) -> show());
         show();
     }
 
     private VBox writing() {
         target.setId("intake-target");
-        target.textProperty().bindBidirectional(model.target());
+        target.textProperty().bindBidirectional(model.writing().target());
         HBox.setHgrow(target, Priority.ALWAYS);
         Button choose = new Button(Words.of("intake.target.choose"));
-        choose.setOnAction(pressed -> model.chooseTarget());
+        choose.setOnAction(pressed -> model.writing().choose());
         write.setId("intake-write");
         write.getStyleClass().add("accent");
         write.setOnAction(pressed -> model.write());
         describe.setId("intake-describe");
         describe.setOnAction(pressed -> model.describe());
         cancel.setId("intake-cancel");
-        cancel.setOnAction(pressed -> model.cancel());
+        cancel.setOnAction(pressed -> model.writing().cancel());
         for (Button button : List.of(write, describe, cancel, choose)) {
             button.setMinWidth(USE_PREF_SIZE);
         }
@@ -110,7 +110,7 @@ final class OutcomePane extends VBox {
         findings.show(findings());
         verdict.setText(model.made().get().map(this::verdict).orElse(""));
         model.made().get().ifPresent(this::showWriting);
-        PaneState state = model.written().get();
+        PaneState state = model.writing().state().get();
         boolean working = state.phase() == PaneState.Phase.WORKING;
         written.getStyleClass().remove("sl-fault");
         if (state.phase() == PaneState.Phase.FAILED) {

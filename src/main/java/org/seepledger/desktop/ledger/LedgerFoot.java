@@ -2,6 +2,7 @@ package org.seepledger.desktop.ledger;
 
 import javafx.collections.ListChangeListener;
 import javafx.geometry.HPos;
+import javafx.scene.control.Hyperlink;
 import javafx.scene.control.Label;
 import javafx.scene.control.Tooltip;
 import javafx.scene.layout.ColumnConstraints;
@@ -49,8 +50,11 @@ final class LedgerFoot extends GridPane {
         Label name = new Label(row.label());
         name.getStyleClass().add("sl-muted");
         name.setMinWidth(USE_PREF_SIZE);
-        Label figure = new Label(model.text(row, row.net()));
-        figure.getStyleClass().addAll("sl-figure", "sl-strong");
+        Hyperlink figure = new Hyperlink(model.text(row, row.net()));
+        figure.setId("total-" + row.item().replaceAll("[ ,]+", "-"));
+        figure.getStyleClass().addAll("sl-figure", "sl-strong", "sl-total");
+        figure.setTooltip(new Tooltip(Words.of("ledger.origin")));
+        figure.setOnAction(pressed -> model.askOrigin(row));
         figure.setMinWidth(USE_PREF_SIZE);
         if (!Double.isNaN(row.low())) {
             String bracket = Words.of("ledger.bracket", model.text(row, row.low()), model.text(row, row.high()));

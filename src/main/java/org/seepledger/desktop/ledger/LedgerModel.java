@@ -150,15 +150,18 @@ public final class LedgerModel {
 
     /** Asks where the number of the chosen row comes from. */
     public void askOrigin() {
-        if (sheets.ofSolute()) {
-            session.notices().refuse(Words.of("ledger.origin.water"));
-            return;
-        }
         chosen.get()
-                .filter(row -> row.kind() != LedgerRow.Kind.HEADING)
-                .ifPresentOrElse(
-                        row -> session.asked().set(Optional.of(new RowAsked(row.group(), row.item(), row.layer()))),
-                        () -> session.notices().refuse(Words.of("ledger.origin.none")));
+                .filter(row -> row.kind() != LedgerRow.Kind.HEADING && row.kind() != LedgerRow.Kind.HELD)
+                .ifPresentOrElse(this::askOrigin, () -> session.notices().refuse(Words.of("ledger.origin.none")));
+    }
+
+    /**
+     * Asks where the number of a row comes from.
+     *
+     * @param row the row
+     */
+    public void askOrigin(LedgerRow row) {
+        session.asked().set(Optional.of(new RowAsked(row.group(), row.item(), row.layer())));
     }
 
     /** {@return the first row about the face that is lit up, if there is one} */

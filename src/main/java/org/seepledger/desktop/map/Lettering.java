@@ -51,7 +51,9 @@ final class Lettering {
     static List<Mark> of(MapModel model) {
         Lettering lettering = new Lettering(model);
         Session session = model.session();
+        List<WellPlace> wells = model.overlays().wells().get() ? lettering.nearWells() : List.of();
         session.selectedPrism().ifPresent(lettering::keepVerticesFree);
+        wells.forEach(lettering::keepFree);
         session.selectedPrism()
                 .ifPresent(prism -> lettering.flows(prism, session.faceFlows().get()));
         session.selectedPrism().ifPresent(prism -> lettering.name(prism, true));
@@ -60,11 +62,7 @@ final class Lettering {
                 lettering.name(prism, false);
             }
         }
-        if (model.overlays().wells().get()) {
-            List<WellPlace> near = lettering.nearWells();
-            near.forEach(lettering::keepFree);
-            near.forEach(lettering::well);
-        }
+        wells.forEach(lettering::well);
         session.drawing().get().prisms().forEach(lettering::keepFree);
         model.contours().lines().get().forEach(lettering::contour);
         return lettering.marks;

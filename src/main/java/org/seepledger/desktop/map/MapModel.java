@@ -91,7 +91,7 @@ public final class MapModel {
                                     return set.workbench().wells(interval);
                                 },
                                 session.wells()::set,
-                                fault -> session.status().set(FaultWords.of(fault))),
+                                fault -> session.notices().refuse(FaultWords.of(fault))),
                         () -> session.wells().set(List.of()));
     }
 

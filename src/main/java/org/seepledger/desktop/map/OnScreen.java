@@ -8,8 +8,8 @@ final class OnScreen {
     /** Letters begin this far outside, in logical pixels. */
     private static final double BESIDE = 300;
 
-    /** Places nearer than this come to the same pixel. */
-    private static final double SAME = 0.8;
+    /** Places nearer than this look like one, in logical pixels. */
+    private static final double SAME = 1.6;
 
     private OnScreen() {}
 
@@ -18,7 +18,7 @@ final class OnScreen {
         return x > -BESIDE && y > -BESIDE && x < camera.width() + BESIDE && y < camera.height() + BESIDE;
     }
 
-    /** A line on the screen, without the places that come to the same pixel as the one before; nothing if it is not seen. */
+    /** A line on the screen, without the places that look like the one before; nothing if it is not seen. */
     static double[] thinned(double[] line, Camera camera) {
         double[] xy = new double[line.length];
         int count = 0;

@@ -21,6 +21,8 @@ import org.seepledger.unit.Figures;
 /** What is shown, as a sentence: this quantity, of this layer, in this interval. */
 public final class ShowingBar extends HBox {
 
+    private static final double LEAST_WIDTH = 96;
+
     private final MapModel model;
     private final ComboBox<MapQuantity> quantity = new ComboBox<>();
     private final Label layer = new Label();
@@ -35,6 +37,7 @@ public final class ShowingBar extends HBox {
         this.model = model;
         getStyleClass().add("sl-showing");
         quantity.setId("quantity");
+        quantity.setMinWidth(LEAST_WIDTH);
         quantity.setItems(model.values().quantities());
         quantity.setConverter(new StringConverter<>() {
             @Override

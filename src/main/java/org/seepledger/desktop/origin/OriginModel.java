@@ -22,13 +22,14 @@ import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.RowAsked;
 import org.seepledger.desktop.session.Session;
+import org.seepledger.desktop.solute.MassReading;
+import org.seepledger.desktop.solute.SoluteLook;
 import org.seepledger.desktop.task.EntryGuard;
 import org.seepledger.desktop.task.Lane;
 import org.seepledger.desktop.task.PaneState;
 import org.seepledger.desktop.task.Tasks;
 import org.seepledger.desktop.words.FaultWords;
 import org.seepledger.desktop.words.Words;
-import org.seepledger.job.TraceJob;
 import org.seepledger.job.TracedNumber;
 import org.seepledger.job.TracedNumber.Line;
 import org.seepledger.prism.Prism;
@@ -47,6 +48,8 @@ public final class OriginModel {
 
     private final Session session;
     private final Reading reading;
+    private final MassReading masses;
+    private final SoluteLook look;
     private final FileDialogs dialogs;
     private final CopyBoard copies;
     private final Lane tracing;
@@ -68,19 +71,31 @@ public final class OriginModel {
      *
      * @param session what the window looks at, and which row is asked about
      * @param reading the period and the units of the ledger
+     * @param masses the units of solutes
+     * @param look how solutes are balanced
      * @param tasks does the work
      * @param dialogs asks where to write
      * @param copies where the command is copied to
      */
-    public OriginModel(Session session, Reading reading, Tasks tasks, FileDialogs dialogs, CopyBoard copies) {
+    public OriginModel(
+            Session session,
+            Reading reading,
+            MassReading masses,
+            SoluteLook look,
+            Tasks tasks,
+            FileDialogs dialogs,
+            CopyBoard copies) {
         this.session = session;
         this.reading = reading;
+        this.masses = masses;
+        this.look = look;
         this.dialogs = dialogs;
         this.copies = copies;
         this.tracing = tasks.latest("task.trace");
         this.writing = tasks.latest("task.trace.writing");
         session.asked().addListener((asked, before, after) -> after.ifPresent(this::ask));
         session.set().addListener((set, before, after) -> clear(nothing()));
+        session.solute().addListener((solute, before, after) -> clear(nothing()));
         session.drawing().addListener((drawing, before, after) -> showRemark());
         session.shapes().addListener((shapes, before, after) -> showRemark());
         sought.addListener((text, before, after) -> fill());
@@ -111,13 +126,18 @@ public final class OriginModel {
         if (set.isEmpty() || prism.isEmpty()) {
             return;
         }
-        if (!session.solute().get().isEmpty() || row.item().isEmpty()) {
-            boolean water = session.solute().get().isEmpty();
-            state.set(PaneState.empty(Words.of(water ? "origin.group" : "origin.solute")));
+        if (row.item().isEmpty()) {
+            state.set(PaneState.empty(Words.of("origin.group")));
             return;
         }
         trace(Question.of(
-                set.get(), prism.get(), row, reading, session.interval().get()));
+                set.get(), prism.get(), row, reading, session.interval().get(), solute(set.get())));
+    }
+
+    private Optional<Question.OfSolute> solute(OpenSet set) {
+        return Optional.of(session.solute().get())
+                .filter(name -> !name.isEmpty())
+                .map(name -> new Question.OfSolute(name, look.choice(set), masses.inUse(set)));
     }
 
     /** Asks the last question again, of the prism as it is drawn now. */
@@ -134,7 +154,9 @@ public final class OriginModel {
         belongs.set(Words.of(
                 "origin.belongs",
                 asked.prism().name(),
-                asked.itemWords(),
+                asked.solute()
+                        .map(read -> Words.of("ledger.of.solute", read.name(), asked.itemWords()))
+                        .orElse(asked.itemWords()),
                 PeriodWords.of(
                         asked.period(),
                         asked.set().aquifer().times(),
@@ -161,10 +183,9 @@ public final class OriginModel {
 
     private void answered(TracedNumber number) {
         answer = Optional.of(number);
-        Wording wording = Wording.typeset(number.units());
-        String unit = wording.unit(number.units().rate());
+        String unit = Wording.raised(number.units().rate());
         sum.set(Words.of("origin.sum", shown(number.net()), unit, number.count(), exact(number.sum()))
-                + volume(number, wording));
+                + amount(number));
         fill();
         showRemark();
         state.set(PaneState.READY);
@@ -175,20 +196,15 @@ public final class OriginModel {
         return String.valueOf(number).replace('-', '\u2212');
     }
 
-    /** What the ledger shows where it shows volumes. */
-    private String volume(TracedNumber number, Wording wording) {
-        if (!reading.volumes().get()) {
-            return "";
-        }
-        double volume = number.net()
-                / number.units().rateFactor()
-                * number.period().duration()
-                * number.units().volumeFactor();
-        return " "
-                + Words.of(
-                        "origin.volume",
-                        shown(volume),
-                        wording.unit(number.units().volume()));
+    /** What the ledger shows where it shows volumes or masses. */
+    private String amount(TracedNumber number) {
+        return reading.volumes().get()
+                ? " "
+                        + Words.of(
+                                "origin.amount",
+                                shown(number.amount()),
+                                Wording.raised(number.units().amount()))
+                : "";
     }
 
     private void fill() {
@@ -200,7 +216,7 @@ public final class OriginModel {
         lines.setAll(
                 number.largest().stream().filter(line -> holds(line, words)).toList());
         double part = lines.stream().mapToDouble(Line::contribution).sum();
-        String unit = Wording.typeset(number.units()).unit(number.units().rate());
+        String unit = Wording.raised(number.units().rate());
         String text = Words.of("origin.shown", lines.size(), shown(part), unit);
         shown.set(
                 number.count() > number.largest().size()
@@ -290,7 +306,7 @@ public final class OriginModel {
                 progress -> {
                     EntryGuard.enter();
                     asked.set().workbench().mustHold(asked.prisms(), drawing);
-                    TraceJob.run(asked.request(file), progress);
+                    asked.write(file, progress);
                     return file;
                 },
                 written -> session.notices().done(Words.of("origin.written", written)),

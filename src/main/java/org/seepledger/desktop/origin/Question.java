@@ -1,6 +1,8 @@
 package org.seepledger.desktop.origin;
 
+import java.io.IOException;
 import java.nio.file.Path;
+import java.util.List;
 import java.util.Optional;
 import org.seepledger.balance.Periods;
 import org.seepledger.balance.WellRule;
@@ -10,7 +12,12 @@ import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Opening;
 import org.seepledger.desktop.session.RowAsked;
 import org.seepledger.desktop.words.Words;
+import org.seepledger.io.result.MassUnits;
 import org.seepledger.io.result.ResultUnits;
+import org.seepledger.job.SoluteBench;
+import org.seepledger.job.SoluteTraceJob;
+import org.seepledger.job.SoluteTraceRequest;
+import org.seepledger.job.TraceJob;
 import org.seepledger.job.TraceRequest;
 import org.seepledger.job.TracedNumber;
 import org.seepledger.ledger.Line;
@@ -28,8 +35,9 @@ import org.seepledger.unit.Measure;
  * @param period the period
  * @param every how long periods are
  * @param waterYearStart the month in which a water year begins
- * @param rateUnit the unit of rates; empty for the set's own
- * @param units the units of results
+ * @param rateUnit the unit of rates that the command is to be given; empty for the set's own
+ * @param units the units of water's results
+ * @param solute how the solute is read whose number it is; empty for water
  */
 record Question(
         OpenSet set,
@@ -39,11 +47,22 @@ record Question(
         Periods.Every every,
         int waterYearStart,
         Optional<Measure> rateUnit,
-        ResultUnits units) {
+        ResultUnits units,
+        Optional<OfSolute> solute) {
 
     private static final int OCTOBER = 10;
 
-    static Question of(OpenSet set, Prism prism, RowAsked row, Reading reading, int interval) {
+    /**
+     * How a solute is read.
+     *
+     * @param name its name
+     * @param choice how solutes are balanced
+     * @param units the units of masses
+     */
+    record OfSolute(String name, SoluteBench.Choice choice, MassUnits units) {}
+
+    static Question of(
+            OpenSet set, Prism prism, RowAsked row, Reading reading, int interval, Optional<OfSolute> solute) {
         return new Question(
                 set,
                 prism,
@@ -51,10 +70,13 @@ record Question(
                 reading.period(set, interval),
                 reading.every().get(),
                 reading.waterYearStart().get(),
-                Optional.of(reading.rateUnit().get())
-                        .filter(unit -> !unit.isEmpty())
-                        .map(Measure::of),
-                reading.inUse(set));
+                solute.isPresent()
+                        ? solute.map(read -> read.units().rate())
+                        : Optional.of(reading.rateUnit().get())
+                                .filter(unit -> !unit.isEmpty())
+                                .map(Measure::of),
+                reading.inUse(set),
+                solute);
     }
 
     private String rowName() {
@@ -73,8 +95,14 @@ record Question(
     }
 
     TracedNumber answer(int most, Progress progress) {
+        List<Period> periods = set.workbench().periods(every, waterYearStart);
+        if (solute.isEmpty()) {
+            return set.workbench().trace(prism, rowName(), periods, units, most, progress);
+        }
+        OfSolute read = solute.get();
         return set.workbench()
-                .trace(prism, rowName(), set.workbench().periods(every, waterYearStart), units, most, progress);
+                .solutes()
+                .trace(prism, read.name(), rowName(), periods, read.choice(), read.units(), most, progress);
     }
 
     private Path aquifer() {
@@ -89,6 +117,8 @@ record Question(
     CommandText command() {
         return CommandText.of("trace", aquifer())
                 .with("--prisms", prisms())
+                .with("--solute", solute.map(OfSolute::name))
+                .flag("--dispersion", isDispersed())
                 .with("--row", rowName())
                 .with("--out", "trace.csv")
                 .with(
@@ -101,7 +131,20 @@ record Question(
                 .flag("--clip", true);
     }
 
-    TraceRequest request(Path out) {
+    private boolean isDispersed() {
+        return solute.filter(read -> read.choice().dispersion()).isPresent();
+    }
+
+    /** Writes the whole trace, as the command does. */
+    void write(Path out, Progress progress) throws IOException {
+        if (solute.isEmpty()) {
+            TraceJob.run(request(out), progress);
+        } else {
+            SoluteTraceJob.run(new SoluteTraceRequest(request(out), solute.get().name(), isDispersed()), progress);
+        }
+    }
+
+    private TraceRequest request(Path out) {
         return new TraceRequest(
                 aquifer(),
                 prisms(),

@@ -5,13 +5,10 @@ import java.util.List;
 import java.util.Locale;
 import java.util.function.Function;
 import javafx.beans.property.Property;
-import javafx.geometry.Insets;
 import javafx.scene.control.Button;
 import javafx.scene.control.ChoiceBox;
 import javafx.scene.control.Label;
-import javafx.scene.control.ScrollPane;
 import javafx.scene.layout.GridPane;
-import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 import javafx.util.StringConverter;
 import org.seepledger.desktop.budget.Reading;
@@ -55,18 +52,11 @@ public final class PreferencesPage extends VBox {
         done.setDefaultButton(true);
         done.setCancelButton(true);
         done.setOnAction(pressed -> close.run());
-        ScrollPane scroll = new ScrollPane(new VBox(12, rows, note));
-        scroll.setHbarPolicy(ScrollPane.ScrollBarPolicy.NEVER);
-        rows.setPadding(new Insets(0, 16, 0, 0));
-        setVgrow(scroll, Priority.ALWAYS);
-        getChildren().addAll(title, scroll, done);
+        getChildren().addAll(title, rows, note, done);
     }
 
     /** Moves the keyboard to the first choice. */
     public void open() {
-        // What lies in a scroll pane is in the scene, and can have the keyboard, only once its looks are there.
-        applyCss();
-        layout();
         rows.lookup(".choice-box").requestFocus();
     }
 

@@ -6,12 +6,12 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import javafx.beans.value.ObservableValue;
 import javafx.scene.AccessibleRole;
-import javafx.scene.canvas.Canvas;
 import javafx.scene.canvas.GraphicsContext;
 import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.Region;
 import org.seepledger.desktop.action.OwnKeys;
 import org.seepledger.desktop.paint.MarkPainter;
+import org.seepledger.desktop.paint.SharpCanvas;
 import org.seepledger.desktop.theme.Theme;
 import org.seepledger.picture.Box;
 import org.seepledger.picture.Ink;
@@ -26,8 +26,8 @@ final class SectionCanvas extends Region implements OwnKeys {
 
     private final SectionModel model;
     private final ObservableValue<Theme> theme;
-    private final Canvas picture = new Canvas();
-    private final Canvas above = new Canvas();
+    private final SharpCanvas picture = new SharpCanvas(this::repaintAll);
+    private final SharpCanvas above = new SharpCanvas(this::repaint);
     private boolean stale = true;
 
     SectionCanvas(SectionModel model, ObservableValue<Theme> theme) {
@@ -40,6 +40,7 @@ final class SectionCanvas extends Region implements OwnKeys {
         model.section().addListener((section, before, after) -> repaintAll());
         model.frame().addListener((frame, before, after) -> repaintAll());
         theme.addListener((lit, before, after) -> repaintAll());
+        model.session().numbers().addListener((form, before, after) -> repaintAll());
         model.session().along().addListener((along, before, after) -> repaint());
     }
 
@@ -68,10 +69,8 @@ final class SectionCanvas extends Region implements OwnKeys {
         double width = Math.floor(getWidth());
         double height = Math.floor(getHeight());
         if (width != picture.getWidth() || height != picture.getHeight()) {
-            for (Canvas canvas : List.of(picture, above)) {
-                canvas.setWidth(width);
-                canvas.setHeight(height);
-            }
+            picture.size(width, height);
+            above.size(width, height);
             model.resize(width, height);
             stale = true;
         }
@@ -85,7 +84,8 @@ final class SectionCanvas extends Region implements OwnKeys {
     }
 
     private List<Mark> drawn(Section section, SectionFrame frame) {
-        Picture drawn = SectionPicture.of(section, frame);
+        Picture drawn = SectionPicture.of(section, frame)
+                .written(model.session().numbers().get()::label);
         setAccessibleText(drawn.title() + ". " + drawn.description());
         return drawn.marks();
     }
@@ -108,8 +108,8 @@ final class SectionCanvas extends Region implements OwnKeys {
         return marks;
     }
 
-    private void paint(Canvas canvas, List<Mark> marks) {
-        GraphicsContext context = canvas.getGraphicsContext2D();
+    private void paint(SharpCanvas canvas, List<Mark> marks) {
+        GraphicsContext context = canvas.context();
         context.clearRect(0, 0, canvas.getWidth(), canvas.getHeight());
         new MarkPainter(context, theme.getValue()).paint(marks);
     }

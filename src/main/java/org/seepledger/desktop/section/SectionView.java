@@ -15,6 +15,7 @@ import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
 import javafx.scene.layout.StackPane;
 import org.seepledger.desktop.action.Action;
+import org.seepledger.desktop.pane.FieldFault;
 import org.seepledger.desktop.pane.StatePane;
 import org.seepledger.desktop.theme.Theme;
 import org.seepledger.desktop.words.Words;
@@ -26,6 +27,7 @@ public final class SectionView extends BorderPane {
     private static final double LEAST_HEIGHT = 236;
     private final SectionModel model;
     private final SectionCanvas canvas;
+    private final FieldFault fault = new FieldFault("section-fault");
     private final TextField times = field("section-times", 4);
     private final TextField within = field("section-within", 5);
     private final TextField top = field("section-top", 5);
@@ -76,6 +78,7 @@ public final class SectionView extends BorderPane {
         HBox bar = new HBox(
                 6,
                 readout,
+                fault,
                 muted("section.top"),
                 top,
                 muted("section.bottom"),
@@ -119,11 +122,13 @@ public final class SectionView extends BorderPane {
     }
 
     /** A value is taken by Enter, and when the keyboard leaves the field; one that is refused is put back. */
-    private static void take(TextField field, Predicate<String> taken) {
+    private void take(TextField field, Predicate<String> taken) {
+        field.textProperty().addListener((text, before, after) -> fault.say(""));
         Runnable take = () -> {
             String before = (String) field.getUserData();
             if (!field.getText().equals(before) && !taken.test(field.getText())) {
                 field.setText(before);
+                fault.say(model.session().status().get());
             }
         };
         field.setOnAction(entered -> take.run());

@@ -3,8 +3,6 @@ package org.seepledger.desktop.shell;
 import javafx.beans.value.ObservableValue;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
-import javafx.scene.control.ScrollPane;
-import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.ledger.Disclaimer;
@@ -26,14 +24,11 @@ final class CautionPage extends VBox {
         ofSolutes.visibleProperty().bind(solutes);
         ofSolutes.managedProperty().bind(ofSolutes.visibleProperty());
         sentences.getChildren().add(ofSolutes);
-        ScrollPane scroll = new ScrollPane(sentences);
-        scroll.setFitToWidth(true);
-        setVgrow(scroll, Priority.ALWAYS);
         Button done = new Button(Words.of("close"));
         done.setDefaultButton(true);
         done.setCancelButton(true);
         done.setOnAction(pressed -> close.run());
-        getChildren().addAll(title, scroll, done);
+        getChildren().addAll(title, sentences, done);
     }
 
     private static Label line(String sentence) {

@@ -11,6 +11,7 @@ import javafx.scene.Scene;
 import javafx.scene.control.ButtonBase;
 import javafx.scene.control.CheckBox;
 import javafx.scene.control.Control;
+import javafx.scene.control.ScrollPane;
 import javafx.scene.control.SplitPane;
 import javafx.scene.control.TextInputControl;
 import javafx.scene.input.KeyCode;
@@ -62,6 +63,7 @@ public final class ShellView extends StackPane {
     private final Optional<Fold> below;
     private final BorderPane work = new BorderPane();
     private final StackPane veil = new StackPane();
+    private final StackPane around = new StackPane();
     private Optional<Node> before = Optional.empty();
     private final ActionsPage actionsPage;
     private final PreferencesPage preferencesPage;
@@ -114,8 +116,14 @@ public final class ShellView extends StackPane {
                 this::showCaution));
         veil.getStyleClass().add("sl-veil");
         veil.setVisible(false);
+        ScrollPane scroll = new ScrollPane(around);
+        scroll.setFitToWidth(true);
+        scroll.setFitToHeight(true);
+        scroll.setFocusTraversable(false);
+        scroll.getStyleClass().add("sl-clear");
+        veil.getChildren().add(scroll);
         veil.setOnMousePressed(press -> {
-            if (press.getTarget() == veil) {
+            if (press.getTarget() == around) {
                 lift();
             }
         });
@@ -134,7 +142,8 @@ public final class ShellView extends StackPane {
     /** The page that is not shown needs no room, but is laid out, so that it is there at once when it is turned to. */
     @Override
     protected double computeMinWidth(double height) {
-        return shown().minWidth(height);
+        double least = shown().minWidth(height);
+        return shown() == work ? Math.max(least, work.getTop().minWidth(-1)) : least;
     }
 
     @Override
@@ -268,14 +277,17 @@ public final class ShellView extends StackPane {
         if (!veil.isVisible()) {
             before = Optional.ofNullable(getScene()).map(Scene::getFocusOwner);
         }
-        veil.getChildren().setAll(page);
+        around.getChildren().setAll(page);
         veil.setVisible(true);
+        // What lies in a scroll pane is in the scene, and can have the keyboard, only once its looks are there.
+        veil.applyCss();
+        veil.layout();
     }
 
     /** Puts away what is shown over all else. */
     public void lift() {
         veil.setVisible(false);
-        veil.getChildren().clear();
+        around.getChildren().clear();
         before.filter(node -> node.getScene() != null && holds(shown(), node))
                 .ifPresentOrElse(
                         Node::requestFocus, () -> focusIn(model.atWelcome().get() ? slots.welcome() : slots.map()));
@@ -309,8 +321,8 @@ public final class ShellView extends StackPane {
         if (owner != null
                 && veil.isVisible()
                 && !holds(veil, owner)
-                && !veil.getChildren().isEmpty()) {
-            focusIn(veil);
+                && !around.getChildren().isEmpty()) {
+            focusIn(around);
         }
     }
 

@@ -6,6 +6,7 @@ import javafx.geometry.Bounds;
 import javafx.geometry.Orientation;
 import javafx.scene.Node;
 import javafx.scene.control.ScrollBar;
+import javafx.scene.control.ScrollPane;
 import javafx.scene.input.ScrollEvent;
 import javafx.scene.layout.Region;
 import javafx.scene.shape.Rectangle;
@@ -116,11 +117,36 @@ public final class Magnifier extends Region {
 
     /** Brings the node that has the keyboard into view; of a large one its beginning. */
     private void show(Node node) {
+        for (Node up = node; up != null; up = up.getParent()) {
+            if (up instanceof ScrollPane pane && up != node) {
+                reveal(pane, node);
+            }
+        }
         if (node != null && !above.isVisible() && (across.isVisible() || down.isVisible())) {
             layout();
             Bounds place = sceneToLocal(node.localToScene(node.getBoundsInLocal()));
             move(across, beyond(place.getMinX(), place.getMaxX(), getWidth() - down.getWidth()));
             move(down, beyond(place.getMinY(), place.getMaxY(), getHeight() - across.getHeight()));
+        }
+    }
+
+    private static void reveal(ScrollPane pane, Node node) {
+        pane.applyCss();
+        pane.layout();
+        Bounds whole = pane.getContent().getLayoutBounds();
+        Bounds seen = pane.getViewportBounds();
+        Bounds place = pane.getContent().sceneToLocal(node.localToScene(node.getBoundsInLocal()));
+        double across = whole.getWidth() - seen.getWidth();
+        double down = whole.getHeight() - seen.getHeight();
+        if (across > 0) {
+            double from = pane.getHvalue() * across;
+            double by = beyond(place.getMinX() - from, place.getMaxX() - from, seen.getWidth());
+            pane.setHvalue(Math.max(0, Math.min(1, (from + by) / across)));
+        }
+        if (down > 0) {
+            double from = pane.getVvalue() * down;
+            double by = beyond(place.getMinY() - from, place.getMaxY() - from, seen.getHeight());
+            pane.setVvalue(Math.max(0, Math.min(1, (from + by) / down)));
         }
     }
 

@@ -168,13 +168,18 @@ public final class ReviewPage {
             words.append(", recomputed ").append(Figures.typeset(finding.recomputed()));
             words.append(finding.unit().isEmpty() ? "." : " " + finding.unit() + ".");
         }
-        return words.toString();
+        return typeset(words.toString());
+    }
+
+    /** The same words with the quotation marks and the minus that a page has. */
+    private static String typeset(String plain) {
+        return plain.replaceAll("\"([^\"]*)\"", "\u201c$1\u201d").replaceAll("(?<=[ (])-(?=\\d)", "\u2212");
     }
 
     private DomContent questions() {
         List<String> asked = result.findings().stream()
                 .filter(finding -> finding.severity() != Severity.NOTE)
-                .map(finding -> (finding.item().equals(Finding.SEVERAL) ? "" : finding.item() + ": ")
+                .map(finding -> (finding.item().equals(Finding.SEVERAL) ? "" : "\u201c" + finding.item() + "\u201d: ")
                         + finding.code().question())
                 .distinct()
                 .toList();

@@ -66,11 +66,11 @@ final class Coverage {
         return series.stream().flatMap(one -> one.points().stream());
     }
 
+    /** What an item brings or takes in all, as a share of throughput. */
     private static double share(Point point, String key) {
         Selection selection = new Selection(Set.of(key), Set.of(), -1);
-        double in = selection.of(point.basis(), Selection.Way.GROSS, Sense.IN);
-        double out = selection.of(point.basis(), Selection.Way.GROSS, Sense.OUT);
-        return Math.max(in, out) * point.source().cubicMetres() / Math.max(point.throughput(), 1e-300);
+        double net = selection.of(point.basis(), Selection.Way.NET, Sense.NET);
+        return Math.abs(net) * point.source().cubicMetres() / Math.max(point.throughput(), 1e-300);
     }
 
     private void takeIn(Series one) {

@@ -14,7 +14,7 @@ final class ColumnWords {
     private static final Pattern SHARE = Pattern.compile("%|per ?cent|share|of total|of throughput");
     private static final Pattern OF_THE_WHOLE = Pattern.compile("closure|error|discrepanc|imbalance|residual");
     private static final Pattern VALUE = Pattern.compile(
-            "(net|gross|mean|average|total)? ?(values?|amounts?|rates?|volumes?|flows?|flow rates?|in|out|net|in-?flows?|out-?flows?|quantity|balance|credit|debit|gains?|losses)( (rates?|volumes?|flows?|values?|depth))?");
+            "(net|gross|mean|average|total)? ?(values?|amounts?|rates?|volumes?|flows?|flow rates?|depths?|in|out|net|in-?flows?|out-?flows?|quantity|balance|credit|debit|gains?|losses)( (rates?|volumes?|flows?|values?|depth))?");
 
     private ColumnWords() {}
 
@@ -42,7 +42,7 @@ final class ColumnWords {
                 Role.AREA);
         roles.put(
                 Pattern.compile(
-                        "remarks?|notes?|comments?|source|references?|methods?|uncertainty|no\\.?|#|id|days|rank|reliability|confidence"),
+                        "mean|average|avg\\.?|median|min(imum)?|max(imum)?|remarks?|notes?|comments?|source|references?|methods?|uncertainty|no\\.?|#|id|days|rank|reliability|confidence"),
                 Role.IGNORED);
         return roles;
     }

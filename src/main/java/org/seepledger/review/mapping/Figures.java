@@ -192,8 +192,17 @@ public final class Figures {
             }
             boolean down = meaning.term().isEmpty();
             Tie tie = mapping.terms().getOrDefault(down ? label(term, group) : meaning.term(), Tie.of(Kind.UNTIED));
-            add(row, column, down ? term : meaning.term(), tie, ofRow, numeral.get());
+            add(row, column, down ? term : meaning.term(), oneWay(tie, meaning), ofRow, numeral.get());
         }
+    }
+
+    /** A total in a column of what comes in, or goes out, is the total of that. */
+    private static Tie oneWay(Tie tie, Column meaning) {
+        boolean net = tie.kind() == Kind.NET_TOTAL;
+        if (net && meaning.sense().filter(Sense.IN::equals).isPresent()) {
+            return Tie.of(Kind.TOTAL_IN);
+        }
+        return net && meaning.sense().filter(Sense.OUT::equals).isPresent() ? Tie.of(Kind.TOTAL_OUT) : tie;
     }
 
     private static String kept(String text, String before) {

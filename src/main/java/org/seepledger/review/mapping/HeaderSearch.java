@@ -11,6 +11,7 @@ import org.seepledger.review.sheet.UnitWords;
 final class HeaderSearch {
 
     private static final int LINES_LOOKED_AT = 80;
+    private static final double NUMBER = -2;
 
     private final Sheet sheet;
     private final Numerals numerals;
@@ -89,14 +90,34 @@ final class HeaderSearch {
     private double score(int row) {
         double score = 0;
         int texts = 0;
+        boolean years = yearsInOrder(row);
         for (String cell : sheet.rows().get(row)) {
             String text = cell.strip();
             if (!text.isEmpty()) {
                 texts++;
-                score += score(text);
+                score += isYear(text) && !years ? NUMBER : score(text);
             }
         }
         return texts < 2 ? 0 : score;
+    }
+
+    private static boolean isYear(String text) {
+        return text.matches("\\d{4}");
+    }
+
+    /** Whether numbers that could be years increase, as headings do and figures seldom. */
+    private boolean yearsInOrder(int row) {
+        int before = 0;
+        for (String cell : sheet.rows().get(row)) {
+            if (isYear(cell.strip())) {
+                int year = Integer.parseInt(cell.strip());
+                if (year < before) {
+                    return false;
+                }
+                before = year;
+            }
+        }
+        return true;
     }
 
     private double score(String text) {
@@ -104,7 +125,7 @@ final class HeaderSearch {
             return 2;
         }
         if (numerals.read(text).isPresent()) {
-            return -2;
+            return NUMBER;
         }
         if (ColumnWords.role(text).isPresent()) {
             return 3;

@@ -106,17 +106,31 @@ public final class MappingGuess {
                     || ColumnWords.role(part).filter(Role.VALUE::equals).isPresent()) {
                 continue;
             }
-            if (periods.isPeriod(words) || isWhole(words)) {
-                period = words;
-            } else if (isPrism(words)) {
-                area = words;
-            } else {
-                term = words;
+            String named = periodBehind(words);
+            period = named.isEmpty() ? period : named;
+            String before = words.substring(0, words.length() - named.length()).strip();
+            if (isPrism(before)) {
+                area = before;
+            } else if (!before.isEmpty() && (named.isEmpty() || tied(before))) {
+                term = before;
             }
         }
         Optional<Sense> sense =
                 ColumnWords.role(last).filter(Role.VALUE::equals).flatMap(value -> ColumnWords.sense(last));
         return new Column(text, Role.VALUE, term, period, area, sense, ColumnWords.amount(text), unit);
+    }
+
+    /** The period that a heading is or ends with; empty if none. */
+    private String periodBehind(String words) {
+        String rest = words;
+        while (!rest.isEmpty()) {
+            if (periods.isPeriod(rest) || rest.equals(words) && isWhole(rest)) {
+                return rest;
+            }
+            int blank = rest.indexOf(' ');
+            rest = blank < 0 ? "" : rest.substring(blank + 1);
+        }
+        return "";
     }
 
     private boolean isPrism(String words) {
@@ -133,6 +147,9 @@ public final class MappingGuess {
     private void settleLabels(List<Column> columns, int header) {
         if (missing(columns, Role.PERIOD) && missing(columns, Role.FROM)) {
             claim(columns, header, Role.PERIOD, cell -> periods.isPeriod(cell) || isWhole(cell));
+        }
+        if (missing(columns, Role.UNIT) && missing(columns, Role.RATE_UNIT)) {
+            claim(columns, header, Role.UNIT, UnitWords::isUnit);
         }
         boolean termsAcross =
                 columns.stream().filter(column -> tied(column.term())).count() >= 2;

@@ -24,18 +24,18 @@ final class TermWords {
     }
 
     private static final List<Total> TOTALS = List.of(
-            Total.of("^net closure error$", Kind.IGNORED),
+            Total.of("^net closure error$|^(mean|average|median)$", Kind.IGNORED),
             Total.of(
                     "(closure|error|discrepanc|imbalance|residual|difference).*(%|per ?cent)|^%|per ?cent.*(error|discrepanc|residual|difference)|^closure error$",
                     Kind.PERCENT),
             Total.of(
                     "residual|imbalance|discrepanc|unaccounted|unexplained|closure|balance error|" + IN + " ?- ?" + OUT
-                            + " ?- ?|^(error|difference|balance)$",
+                            + " ?- ?|^(error|difference|balance|rest|remainder)$",
                     Kind.RESIDUAL),
             Total.of("(opening|initial|start).*(stor|stock)|(stor|stock).*(start|begin|opening)", Kind.OPENING),
             Total.of("(closing|final|end).*(stor|stock)|(stor|stock).*\\b(end|closing)", Kind.CLOSING),
             Total.of(
-                    "change (in|of) ([\\w-]+ )*stor|storage change|[δ∆Δ] ?s(torage)?\\b|delta s|change in stock",
+                    "change (in|of) ([\\w-]+ )*stor|storage change|[δ∆Δ] ?s(torage)?\\b|delta s|^d ?s$|change in stock",
                     Kind.CHANGE),
             Total.of("sub-?total", Kind.SUBTOTAL),
             Total.of(

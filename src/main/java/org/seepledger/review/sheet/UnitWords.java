@@ -14,6 +14,8 @@ public final class UnitWords {
     private static final Pattern BRACKETED = Pattern.compile("[(\\[]([^()\\[\\]]{1,40})[)\\]]");
     private static final Pattern SPOKEN = Pattern.compile(
             "(?:\\b(?:in|unit|units|as)\\b[: ]+|, *)((?:thousand |million |10\\^?[36] |10[³⁶] |1000 )?[\\p{L}\\-]+[23³²]?(?:(?: ?/ ?| per )[\\p{L}]+| d-1| a-1)?)");
+    private static final Pattern BEHIND = Pattern.compile(
+            ".+[ ,;:]((?:1000 |thousand )?\\p{L}[\\p{L}\\-]*(?:[23³]|[23³]?/[\\p{L}]+)|ML|GL|AF|AFY|acre-ft|acre-feet|ac-ft)");
     private static final Pattern THOUSANDS =
             Pattern.compile("(thousand |10\\^?3 |10³ |1000 |million |10\\^?6 |10⁶ |1000000 |Mio )(.*)");
     private static final double THOUSAND = 1e3;
@@ -49,7 +51,17 @@ public final class UnitWords {
                 return Optional.of(spoken.group(1).strip());
             }
         }
+        Optional<String> behind = behind(heading);
+        if (behind.isPresent()) {
+            return behind;
+        }
         return heading.strip().endsWith("%") ? Optional.of("%") : Optional.empty();
+    }
+
+    /** A unit that a heading ends with and that can hardly be anything else. */
+    private static Optional<String> behind(String heading) {
+        Matcher last = BEHIND.matcher(heading.strip());
+        return last.matches() && isUnit(last.group(1)) ? Optional.of(last.group(1)) : Optional.empty();
     }
 
     /**
@@ -65,7 +77,10 @@ public final class UnitWords {
                     rest, isUnit(bracketed.group(1).strip()) ? "" : Matcher.quoteReplacement(bracketed.group()));
         }
         bracketed.appendTail(rest);
-        return rest.toString().replaceAll("\\s+", " ").strip();
+        String left = rest.toString().replaceAll("\\s+", " ").strip();
+        return behind(left)
+                .map(unit -> left.substring(0, left.length() - unit.length()).strip())
+                .orElse(left);
     }
 
     /**

@@ -75,10 +75,12 @@ class CardTest {
         Path raster = Files.copy(folder.resolve("rock.tif"), elsewhere.resolve("rock.tif"));
         answers.paths.add(Optional.of(raster));
         card.chooseTop("");
-        assertThat(session.status().get()).contains("copy it to").contains(folder.toString());
+        assertThat(session.notices().latest().get().orElseThrow().words())
+                .contains("copy it to")
+                .contains(folder.toString());
         Files.writeString(folder.resolve("broken.tif"), "no raster");
         card.lids("broken.tif", "");
-        assertThat(session.status().get()).contains("broken.tif");
+        assertThat(session.notices().latest().get().orElseThrow().words()).contains("broken.tif");
         answers.paths.add(Optional.empty());
         card.chooseBottom("");
         assertThat(model.drawing()).isEqualTo(before);

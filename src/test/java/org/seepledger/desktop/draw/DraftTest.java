@@ -334,7 +334,9 @@ class DraftTest {
         assertThat(card.topText()).isEqualTo("98.5");
         assertThat(session.selectedPrism().orElseThrow().range()).isInstanceOf(VerticalRange.Elevations.class);
         card.lids("no such.tif", "");
-        assertThat(session.status().get()).contains("no such.tif").contains("does not exist");
+        assertThat(session.notices().latest().get().orElseThrow().words())
+                .contains("no such.tif")
+                .contains("does not exist");
         card.lids("", "");
         assertThat(card.layersText()).isEmpty();
         card.reorder(1);

@@ -61,7 +61,7 @@ class IntakeModelTest {
                 .extracting(ItemRow::title)
                 .containsExactly("The set as a whole", "K.tif", "bottom.tif", "head.tif", "top.tif");
         assertThat(model.check().get().says()).isPresent();
-        assertThat(model.target().get())
+        assertThat(model.writing().target().get())
                 .isEqualTo(folder.resolve("loose-aquifer").toString());
         model.write();
         assertThat(opened).containsExactly(folder.resolve("loose-aquifer"));
@@ -111,10 +111,10 @@ class IntakeModelTest {
         IntakeModel model = model(new DirectTasks());
         model.bring(List.of(loose));
         Files.createDirectories(folder.resolve("taken/inside"));
-        model.target().set(folder.resolve("taken").toString());
+        model.writing().target().set(folder.resolve("taken").toString());
         model.write();
-        assertThat(model.written().get().phase()).isEqualTo(PaneState.Phase.FAILED);
-        assertThat(model.written().get().words()).contains("not empty");
+        assertThat(model.writing().state().get().phase()).isEqualTo(PaneState.Phase.FAILED);
+        assertThat(model.writing().state().get().words()).contains("not empty");
         assertThat(model.shown().get()).isTrue();
         assertThat(opened).isEmpty();
     }
@@ -124,9 +124,9 @@ class IntakeModelTest {
         IntakeModel model = model(new DirectTasks());
         model.bring(List.of(loose));
         for (String wrong : List.of("", "  ", "no" + (char) 0 + "path")) {
-            model.target().set(wrong);
+            model.writing().target().set(wrong);
             model.write();
-            assertThat(model.written().get().phase()).isEqualTo(PaneState.Phase.FAILED);
+            assertThat(model.writing().state().get().phase()).isEqualTo(PaneState.Phase.FAILED);
         }
         assertThat(opened).isEmpty();
     }
@@ -152,10 +152,10 @@ class IntakeModelTest {
         model.bring(List.of(loose));
         tasks.all();
         model.write();
-        assertThat(model.written().get().phase()).isEqualTo(PaneState.Phase.WORKING);
-        model.cancel();
+        assertThat(model.writing().state().get().phase()).isEqualTo(PaneState.Phase.WORKING);
+        model.writing().cancel();
         tasks.all();
-        assertThat(model.written().get()).isEqualTo(PaneState.READY);
+        assertThat(model.writing().state().get()).isEqualTo(PaneState.READY);
         assertThat(folder.resolve("loose-aquifer")).doesNotExist();
         assertThat(opened).isEmpty();
     }

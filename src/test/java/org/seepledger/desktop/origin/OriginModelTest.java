@@ -3,17 +3,25 @@ package org.seepledger.desktop.origin;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import java.io.IOException;
+import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
+import org.apache.commons.csv.CSVRecord;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
 import org.seepledger.balance.Periods;
 import org.seepledger.desktop.budget.LiveSet;
 import org.seepledger.desktop.session.Drawing;
+import org.seepledger.desktop.session.DrawnShapes;
 import org.seepledger.desktop.session.RowAsked;
+import org.seepledger.desktop.solute.MassReading;
+import org.seepledger.desktop.solute.SoluteLook;
 import org.seepledger.desktop.task.DirectTasks;
 import org.seepledger.desktop.task.PaneState;
+import org.seepledger.job.Rows;
 import org.seepledger.job.TracedNumber;
 import org.seepledger.ledger.Entry;
 import org.seepledger.ledger.Group;
@@ -27,8 +35,19 @@ class OriginModelTest {
 
     @BeforeEach
     void open() {
-        live = LiveSet.valley();
-        model = new OriginModel(live.session, live.reading, new DirectTasks(), live.answers, live.answers);
+        open(LiveSet.valley());
+    }
+
+    private void open(LiveSet set) {
+        live = set;
+        model = new OriginModel(
+                live.session,
+                live.reading,
+                new MassReading(live.session, live.reading),
+                new SoluteLook(live.session),
+                new DirectTasks(),
+                live.answers,
+                live.answers);
     }
 
     @AfterEach
@@ -110,9 +129,6 @@ class OriginModelTest {
         assertThat(model.state().get().words()).contains("ratio of sums", "residual");
         ask(Group.SIDE, "", 0);
         assertThat(model.state().get().words()).contains("no row of its own");
-        live.session.solute().set("salt");
-        ask(Group.SIDE, "side 9", 0);
-        assertThat(model.state().get().words()).contains("solutes");
         assertThat(model.command().get()).isEmpty();
     }
 
@@ -135,7 +151,42 @@ class OriginModelTest {
         live.reading.volumes().set(true);
         live.reading.every().set(Periods.Every.YEAR);
         ask(Group.SIDE, "side 9", 0);
-        assertThat(model.sum().get()).contains("m³/d", "the ledger's volume of", "m³.");
+        assertThat(model.sum().get()).contains("m³/d", "m³ over the period");
         assertThat(model.command().get()).contains("--every year");
+    }
+
+    /** A depot's solvent: the file that is written is the command's, and adds up to what the page says. */
+    @Test
+    void numbersOfSolutesAreTracedToConcentrations(@TempDir Path folder) throws IOException {
+        live.close();
+        live = LiveSet.depot();
+        live.session
+                .shapes()
+                .set(new DrawnShapes(
+                        live.set
+                                .workbench()
+                                .drawing(live.set.path().resolve("prisms.geojson"))
+                                .drawing(),
+                        true));
+        open(live);
+        live.session.solute().set("solvent");
+        String side = live.prisms.get(0).rings().get(0).sides().get(0).item();
+        ask(Group.SIDE, side, Line.ALL_LAYERS);
+        assertThat(model.state().get()).isEqualTo(PaneState.READY);
+        assertThat(model.belongs().get()).contains("solvent", side);
+        assertThat(model.sum().get()).contains("kg/d");
+        assertThat(model.lines()).isNotEmpty().allMatch(line -> line.file().equals("concentration.csv"));
+        assertThat(model.command().get()).contains("--solute solvent", "--rate-unit kg/d");
+        Path file = folder.resolve("trace.csv");
+        live.answers.paths.add(Optional.of(file));
+        model.export();
+        List<CSVRecord> rows = Rows.of(file);
+        assertThat(rows).hasSameSizeAs(model.lines());
+        double written = rows.stream()
+                .mapToDouble(row -> Double.parseDouble(row.get("value")) * Double.parseDouble(row.get("weight")))
+                .sum();
+        assertThat(sum()).isCloseTo(written, within(1e-12 * Math.abs(written)));
+        ask(Group.TOTAL, "inflow", Line.ALL_LAYERS);
+        assertThat(model.state().get().words()).contains("not linear in concentrations");
     }
 }

@@ -53,6 +53,23 @@ class WordsTest {
         }
     }
 
+    /** Sentences for people; keys, patterns of dates, tags, what a file is searched for, and faults of the program are none. */
+    @Test
+    void noSentenceStandsOutsideTheBundle() throws IOException {
+        String code = sources()
+                .replaceAll("(?s)/\\*.*?\\*/", "")
+                .replaceAll("//.*", "")
+                .replaceAll("(?:throw|return) new \\w+(?:Fault|Exception)\\b[^;]*;", "");
+        Matcher literal = Pattern.compile("\"((?:[^\"\\\\]|\\\\.)*)\"").matcher(code);
+        while (literal.find()) {
+            String text = literal.group(1);
+            boolean technical = text.matches("(?:Shift\\+)?Page (?:Up|Down)|yyyy.*|<.*|## .*");
+            assertThat(technical || !text.matches(".*\\p{L}{2,} \\p{L}.*"))
+                    .as(text)
+                    .isTrue();
+        }
+    }
+
     @Test
     void valuesAreFilledIn() {
         assertThat(Words.of("open.working", "valley")).isEqualTo("Reading valley");
