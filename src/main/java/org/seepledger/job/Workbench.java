@@ -214,14 +214,14 @@ public final class Workbench implements AutoCloseable {
     }
 
     /**
-     * Makes sure that a file holds a drawing and nothing else.
+     * Makes sure that a file holds the prisms of a drawing and no others.
      *
      * @param file the file
      * @param drawing the drawing
      * @throws UsageFault if it does not
      */
     public void mustHold(Path file, Drawing drawing) {
-        if (!drawing(file).drawing().equals(drawing)) {
+        if (!drawing(file).drawing().shapes().equals(drawing.shapes())) {
             throw new UsageFault("The file " + file + " holds other prisms than are drawn: it was changed meanwhile."
                     + " Save the drawing, then go on.");
         }

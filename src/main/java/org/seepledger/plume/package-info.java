@@ -11,6 +11,9 @@
  *   <li><b>Advective flow</b> in an interval is the water's, times the concentration of the cell that the water leaves, the
  *       mean of the interval's two ends; in and out apart. This spreads a plume like a longitudinal dispersivity of half a
  *       cell. From beyond the grid comes the boundary concentration, else the cell's own.
+ *   <li><b>Cutting</b>: where a side or lid cuts cells, the cell's own concentration counts all through it, while its
+ *       balance is kept at its faces. What that leaves in the residual is the difference to a walk of the mass flow through
+ *       cell faces ({@link org.seepledger.plume.CarriedField}), and told by account.
  *   <li><b>Dispersive flow</b>, by choice, is worked out on cell faces ({@link org.seepledger.plume.DispersiveFaces}) and
  *       walked like the flow of water. Nothing disperses through the grid's outer faces.
  *   <li><b>Sources</b> add water with their own concentration (0 where none is given), and take it with the cell's.

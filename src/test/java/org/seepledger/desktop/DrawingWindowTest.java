@@ -31,7 +31,7 @@ class DrawingWindowTest {
 
     @BeforeEach
     void open() throws IOException {
-        OpenWindow.copy(Path.of("sample-aquifers/valley"), folder);
+        ValleyCopy.into(folder);
         window = new OpenWindow(1600, 1000);
         openSet();
     }

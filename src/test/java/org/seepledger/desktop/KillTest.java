@@ -26,14 +26,6 @@ class KillTest {
     @TempDir
     private Path logs;
 
-    private void copySample() throws IOException {
-        try (var sample = Files.list(Path.of("sample-aquifers/valley"))) {
-            for (Path file : sample.toList()) {
-                Files.copy(file, folder.resolve(file.getFileName()));
-            }
-        }
-    }
-
     private void drawAndBeKilled() throws IOException, InterruptedException {
         Path log = logs.resolve("killed.txt");
         Process window = OtherProcess.start(OtherProcess.inMemory(KilledWindow.class, folder.toString()), log);
@@ -53,7 +45,7 @@ class KillTest {
     @Test
     @Timeout(180)
     void whatWasDrawnIsBackBitForBitAndCanBeUndone() throws IOException, InterruptedException {
-        copySample();
+        ValleyCopy.into(folder);
         byte[] saved = Files.readAllBytes(folder.resolve(Opening.PRISMS));
         drawAndBeKilled();
         assertThat(Files.readAllBytes(folder.resolve(Opening.PRISMS))).isEqualTo(saved);

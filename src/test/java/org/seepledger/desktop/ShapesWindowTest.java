@@ -4,7 +4,6 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import java.io.IOException;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import javafx.geometry.Bounds;
@@ -29,11 +28,7 @@ class ShapesWindowTest {
 
     @BeforeEach
     void open() throws IOException {
-        try (var sample = Files.list(Path.of("sample-aquifers/valley"))) {
-            for (Path file : sample.toList()) {
-                Files.copy(file, folder.resolve(file.getFileName()));
-            }
-        }
+        ValleyCopy.into(folder);
         window = new OpenWindow(1600, 1000);
         window.openSet(folder);
         window.await(() -> window.assembly().map().values().scale().get().isPresent());

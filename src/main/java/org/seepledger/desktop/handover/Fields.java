@@ -24,6 +24,7 @@ import org.seepledger.desktop.words.Words;
 final class Fields extends GridPane {
 
     private static final double LABELS = 124;
+    private static final double LEAST_WIDTH = 150;
     private static final String KEY = "handover.";
 
     private int row;
@@ -118,6 +119,7 @@ final class Fields extends GridPane {
     void path(String key, Entry<?> entry, ObservableValue<String> problem, Runnable asks) {
         TextField field = new TextField();
         entered(key, field, entry);
+        field.setMinWidth(LEAST_WIDTH);
         Button ask = new Button(Words.of("handover.ask"));
         ask.setId(id(key) + "-ask");
         ask.setMinWidth(USE_PREF_SIZE);

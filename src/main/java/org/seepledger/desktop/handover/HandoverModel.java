@@ -18,7 +18,9 @@ import org.seepledger.desktop.command.CommandText;
 import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.port.FileDialogs;
 import org.seepledger.desktop.port.Opener;
+import org.seepledger.desktop.session.DrawnShapes;
 import org.seepledger.desktop.session.OpenSet;
+import org.seepledger.desktop.session.Opening;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.task.EntryGuard;
 import org.seepledger.desktop.task.Lane;
@@ -111,6 +113,7 @@ public final class HandoverModel {
             choices.budget().every().set(Periods.Every.INTERVAL);
         }
         choices.plume().set(hasSolutes());
+        choices.solutes().transects().text().set("");
         session.set()
                 .get()
                 .ifPresent(set -> choices.out().text().set(suggested(set).toString()));
@@ -190,6 +193,25 @@ public final class HandoverModel {
     /** {@return how much of that is done, from 0 to 1} */
     public double share() {
         return advance.share();
+    }
+
+    /** Saved lines lie in a file beside the aquifer. */
+    private void suggestTransects() {
+        DrawnShapes shapes = session.shapes().get();
+        Entry<Path> transects = choices.solutes().transects();
+        if (shapes.saved()
+                && !shapes.drawing().lines().isEmpty()
+                && transects.value().isEmpty()) {
+            session.set()
+                    .get()
+                    .ifPresent(set -> transects
+                            .text()
+                            .set(set.path()
+                                    .resolve(Opening.TRANSECTS)
+                                    .toAbsolutePath()
+                                    .normalize()
+                                    .toString()));
+        }
     }
 
     /** {@return whether the open set has solutes to strike budgets of} */
@@ -344,6 +366,7 @@ public final class HandoverModel {
     /** Goes back to what is chosen. */
     public void chooseAgain() {
         stage.set(Stage.CHOOSING);
+        suggestTransects();
         look();
     }
 

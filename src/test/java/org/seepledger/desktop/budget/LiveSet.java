@@ -74,7 +74,7 @@ public final class LiveSet implements AutoCloseable {
         return new LiveSet(Path.of("sample-aquifers/terrace"));
     }
 
-    /** The depot: 12 dated intervals, two prisms, a solvent and its breakdown product, non-detects. */
+    /** The depot: 24 months, two prisms, a solvent and its breakdown product, non-detects. */
     public static LiveSet depot() {
         return new LiveSet(Path.of("sample-aquifers/depot"));
     }

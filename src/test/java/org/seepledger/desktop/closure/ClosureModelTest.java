@@ -9,6 +9,7 @@ import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.seepledger.balance.Periods;
+import org.seepledger.desktop.ValleyCopy;
 import org.seepledger.desktop.budget.LiveSet;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.task.DirectTasks;
@@ -63,11 +64,7 @@ class ClosureModelTest {
 
     @Test
     void thePeriodShownHasCellsOfItsOwn(@TempDir Path folder) throws IOException {
-        try (var sample = Files.list(Path.of("sample-aquifers/valley"))) {
-            for (Path file : sample.toList()) {
-                Files.copy(file, folder.resolve(file.getFileName()));
-            }
-        }
+        ValleyCopy.into(folder);
         Path described = folder.resolve("aquifer.json");
         Files.writeString(described, Files.readString(described).replace("\"specific_yield.tif\"", "0.02"));
         try (LiveSet wrong = LiveSet.of(folder)) {
