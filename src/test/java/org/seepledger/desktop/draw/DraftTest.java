@@ -48,7 +48,7 @@ class DraftTest {
         Opening opening = Opening.of(folder);
         opened.add(opening);
         session.show(Optional.of(opening.set()));
-        session.wells().set(opening.set().workbench().wells(0));
+        session.wells().set(opening.set().workbench().views().wells(0));
         files.begin(opening);
     }
 
@@ -226,7 +226,8 @@ class DraftTest {
 
     @Test
     void aCircleStandsOnTheWellThatIsClicked() {
-        var well = session.set().get().orElseThrow().workbench().wells(0).get(0);
+        var well =
+                session.set().get().orElseThrow().workbench().views().wells(0).get(0);
         model.choose(Tool.CIRCLE);
         click(well.x() + 7, well.y() - 5);
         hand.type("120");
