@@ -58,6 +58,7 @@ public final class Workbench implements AutoCloseable {
     private final KeptCells kept;
     private final Gate gate = new Gate();
     private final SoluteBench solutes;
+    private final ReviewDesk reviews;
 
     private Workbench(AquiferFolder folder) {
         this.folder = folder;
@@ -65,6 +66,8 @@ public final class Workbench implements AutoCloseable {
         long memory = Runtime.getRuntime().maxMemory() / 4;
         this.kept = new KeptCells(folder.aquifer(), Math.min(MOST_KEPT_BYTES, memory));
         this.solutes = new SoluteBench(folder, kept::around, gate, notes -> reader(notes::add));
+        this.reviews = new ReviewDesk(
+                folder.aquifer(), gate, prism -> reader(note -> {}).admitted(prism), threads());
     }
 
     /**
@@ -319,6 +322,11 @@ public final class Workbench implements AutoCloseable {
     /** {@return what answers questions about solutes} */
     public SoluteBench solutes() {
         return solutes;
+    }
+
+    /** {@return what reviews submitted budgets without writing} */
+    public ReviewDesk reviews() {
+        return reviews;
     }
 
     /**

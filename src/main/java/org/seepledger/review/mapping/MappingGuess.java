@@ -108,8 +108,7 @@ public final class MappingGuess {
             }
             String named = periodBehind(words);
             period = named.isEmpty() ? period : named;
-            String before =
-                    words.substring(0, words.length() - named.length()).strip();
+            String before = words.substring(0, words.length() - named.length()).strip();
             if (isPrism(before)) {
                 area = before;
             } else if (!before.isEmpty() && (named.isEmpty() || tied(before))) {
