@@ -46,6 +46,7 @@ public final class Workbench implements AutoCloseable {
     private final Gate gate = new Gate();
     private final SoluteBench solutes;
     private final ViewBench views;
+    private final ReviewDesk reviews;
 
     private Workbench(AquiferFolder folder) {
         this.folder = folder;
@@ -54,6 +55,8 @@ public final class Workbench implements AutoCloseable {
         this.kept = new KeptCells(folder.aquifer(), Math.min(MOST_KEPT_BYTES, memory));
         this.solutes = new SoluteBench(folder, kept::around, gate, notes -> drawings.reader(notes::add));
         this.views = new ViewBench(this, gate);
+        this.reviews = new ReviewDesk(
+                folder.aquifer(), gate, prism -> drawings.reader(note -> {}).admitted(prism), threads());
     }
 
     /**
@@ -228,6 +231,11 @@ public final class Workbench implements AutoCloseable {
     /** {@return what answers questions about solutes} */
     public SoluteBench solutes() {
         return solutes;
+    }
+
+    /** {@return what reviews submitted budgets without writing} */
+    public ReviewDesk reviews() {
+        return reviews;
     }
 
     /**

@@ -21,6 +21,7 @@ import org.seepledger.unit.Figures;
 /** What is shown, as a sentence: this quantity, of this layer, in this interval. */
 public final class ShowingBar extends HBox {
 
+    private static final double LEAST_LAYER = 56;
     private static final double LEAST_WIDTH = 96;
 
     private final MapModel model;
@@ -119,7 +120,7 @@ public final class ShowingBar extends HBox {
                         shownInterval,
                         model.session().numbers().get()))
                 .orElse(""));
-        layer.setMinWidth(USE_PREF_SIZE);
+        layer.setMinWidth(LEAST_LAYER);
         interval.setMinWidth(USE_PREF_SIZE);
     }
 
