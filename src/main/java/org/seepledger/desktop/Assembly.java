@@ -260,6 +260,7 @@ final class Assembly {
 
     private void again() {
         folio.again();
+        review.again();
         map.values().again();
     }
 

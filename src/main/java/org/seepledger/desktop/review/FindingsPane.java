@@ -25,7 +25,7 @@ import org.seepledger.unit.Figures;
 /** What was found: the verdict, the findings by weight, and of the one that is chosen all that can be said. */
 final class FindingsPane extends BorderPane {
 
-    private static final double NUMBER = 106;
+    private static final double LEAST_SENTENCE = 120;
 
     private final ReviewModel model;
     private final TableView<Finding> table = new TableView<>();
@@ -108,11 +108,11 @@ final class FindingsPane extends BorderPane {
         table.getColumns().add(severity);
         table.getColumns()
                 .add(column("review.code", 112, finding -> finding.code().toString()));
-        table.getColumns().add(column("review.where", 190, FindingsPane::where));
-        table.getColumns().add(number("review.submitted", Finding::submitted));
-        table.getColumns().add(number("review.recomputed", Finding::recomputed));
+        table.getColumns().add(column("review.where", 160, FindingsPane::where));
+        table.getColumns().add(number("review.submitted", 98, Finding::submitted));
+        table.getColumns().add(number("review.recomputed", 112, Finding::recomputed));
         table.getColumns().add(column("review.unit", 70, Finding::unit));
-        table.getColumns().add(number("review.ratio", Finding::ratio));
+        table.getColumns().add(number("review.ratio", 72, Finding::ratio));
         table.getColumns().add(column("review.sentence", 300, Finding::message));
         table.getSelectionModel().selectedItemProperty().addListener((finding, before, after) -> {
             if (after != null) {
@@ -121,16 +121,16 @@ final class FindingsPane extends BorderPane {
         });
     }
 
-    /** {@return where a finding is: its prism, period and term, as far as it is about one} */
+    /** {@return where a finding is: its term, prism and period, as far as it is about one} */
     static String where(Finding finding) {
-        return List.of(finding.prism(), finding.period(), finding.item()).stream()
+        return List.of(finding.item(), finding.prism(), finding.period()).stream()
                 .filter(part -> !part.equals(Finding.SEVERAL) && !part.isEmpty())
                 .reduce((one, other) -> one + ", " + other)
                 .orElse(Words.of("review.everywhere"));
     }
 
-    private TableColumn<Finding, Finding> number(String key, Function<Finding, Double> number) {
-        TableColumn<Finding, Finding> column = column(key, NUMBER, finding -> text(number.apply(finding)));
+    private TableColumn<Finding, Finding> number(String key, double width, Function<Finding, Double> number) {
+        TableColumn<Finding, Finding> column = column(key, width, finding -> text(number.apply(finding)));
         column.getStyleClass().add("sl-numbers");
         return column;
     }
@@ -144,7 +144,7 @@ final class FindingsPane extends BorderPane {
         column.setSortable(false);
         column.setReorderable(false);
         column.setPrefWidth(width);
-        column.setMinWidth(Math.min(width, 60));
+        column.setMinWidth(Math.min(width, LEAST_SENTENCE));
         column.setCellValueFactory(row -> new SimpleObjectProperty<>(row.getValue()));
         column.setCellFactory(made -> new TableCell<>() {
             @Override

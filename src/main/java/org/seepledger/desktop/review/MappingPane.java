@@ -69,9 +69,13 @@ final class MappingPane extends BorderPane {
                         model.waterYearStart()),
                 whole,
                 fault,
-                button("review-mapping-open", "review.mapping.open", model.mapping()::open),
-                button("review-mapping-save", "review.mapping.save", model.mapping()::save),
-                button("review-mapping-guess", "review.mapping.guess", model.mapping()::forget));
+                button("review-mapping-open", "review.mapping.open", "review.mapping.open.tip", model.mapping()::open),
+                button("review-mapping-save", "review.mapping.save", "review.mapping.save.tip", model.mapping()::save),
+                button(
+                        "review-mapping-guess",
+                        "review.mapping.guess",
+                        "review.mapping.guess.tip",
+                        model.mapping()::forget));
         head.getStyleClass().add("sl-review-head");
         return head;
     }
@@ -83,12 +87,12 @@ final class MappingPane extends BorderPane {
         return label;
     }
 
-    private static Button button(String id, String key, Runnable does) {
+    private static Button button(String id, String key, String tip, Runnable does) {
         Button button = new Button(Words.of(key));
         button.setId(id);
         button.getStyleClass().add("small");
         button.setMinWidth(USE_PREF_SIZE);
-        button.setTooltip(new Tooltip(Words.of(key + ".tip")));
+        button.setTooltip(new Tooltip(Words.of(tip)));
         button.setOnAction(pressed -> does.run());
         return button;
     }

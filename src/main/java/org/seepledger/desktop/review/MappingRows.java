@@ -79,20 +79,27 @@ final class MappingRows {
     private MappingRow term(String label, Tie tie, List<Figure> figures) {
         boolean signed = tie.kind() == Kind.ITEM || tie.kind() == Kind.CHANGE;
         List<Sense> counted = figures.stream().map(Figure::sense).distinct().toList();
-        String counts = signed ? counted.stream().map(MappingRows::sense).collect(Collectors.joining(", ")) : "";
         return new MappingRow(
                 "review.row.term",
                 label,
                 words(tie),
                 ties(label, tie),
                 Optional.empty(),
-                counts,
+                signed ? counts(counted, tie.sense()) : "",
                 signed
                         ? senses(counting -> said ->
                                 Corrections.term(said, label, new Tie(tie.kind(), tie.items(), Optional.of(counting))))
                         : List.of(),
                 figures.stream().map(Figure::unit).distinct().collect(Collectors.joining(", ")),
                 Optional.empty());
+    }
+
+    /** What a heading or a column says goes before what is said of the term. */
+    private static String counts(List<Sense> counted, Optional<Sense> said) {
+        String words = counted.stream().map(MappingRows::sense).collect(Collectors.joining(", "));
+        boolean overruled = !counted.isEmpty()
+                && said.filter(sense -> !counted.contains(sense)).isPresent();
+        return overruled ? Words.of("review.counts.headed", words) : words;
     }
 
     private static String words(Tie tie) {

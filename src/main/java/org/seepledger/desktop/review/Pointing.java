@@ -1,5 +1,6 @@
 package org.seepledger.desktop.review;
 
+import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
@@ -36,10 +37,19 @@ final class Pointing {
         session.lit().set("");
         session.pointed().set(Optional.empty());
         session.selected().set(finding.prism());
-        Optional.ofNullable(answer.intervals().get(finding.period())).ifPresent(session.interval()::set);
+        interval(finding).ifPresent(session.interval()::set);
         Optional<RowAsked> row = row(finding);
         row.filter(Pointing::isFace).map(RowAsked::item).ifPresent(session.lit()::set);
         session.pointed().set(row);
+    }
+
+    /** A finding in several periods says in its sentence which of them its numbers are of. */
+    private Optional<Integer> interval(Finding finding) {
+        Optional<String> said = answer.intervals().keySet().stream()
+                .filter(label -> !label.isEmpty() && finding.message().endsWith(" " + label + "."))
+                .max(Comparator.comparingInt(String::length));
+        return Optional.ofNullable(answer.intervals().get(finding.period()))
+                .or(() -> said.map(answer.intervals()::get));
     }
 
     private static boolean isFace(RowAsked row) {

@@ -132,6 +132,11 @@ public final class ReviewModel {
         ask();
     }
 
+    /** Takes up again what was stopped or failed. */
+    public void again() {
+        inquiry.again();
+    }
+
     /**
      * Reads the table otherwise.
      *

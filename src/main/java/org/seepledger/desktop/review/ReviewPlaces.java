@@ -7,6 +7,7 @@ import javafx.scene.Node;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
 import javafx.scene.input.KeyCode;
+import javafx.scene.input.KeyCombination;
 import javafx.scene.input.KeyEvent;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.HBox;
@@ -48,6 +49,14 @@ public final class ReviewPlaces {
             if (key.getCode() == KeyCode.ESCAPE) {
                 close.run();
                 key.consume();
+            } else {
+                view.actions().stream()
+                        .filter(action -> KeyCombination.valueOf(action.keys()).match(key))
+                        .findFirst()
+                        .ifPresent(action -> {
+                            action.perform();
+                            key.consume();
+                        });
             }
         });
     }
