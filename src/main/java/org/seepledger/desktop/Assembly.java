@@ -39,6 +39,9 @@ import org.seepledger.desktop.port.Questions;
 import org.seepledger.desktop.port.RecentFolders;
 import org.seepledger.desktop.port.Settings;
 import org.seepledger.desktop.preferences.PreferencesModel;
+import org.seepledger.desktop.review.ReviewModel;
+import org.seepledger.desktop.review.ReviewPlaces;
+import org.seepledger.desktop.review.WritingModel;
 import org.seepledger.desktop.running.RunningModel;
 import org.seepledger.desktop.running.RunningStrip;
 import org.seepledger.desktop.section.SectionModel;
@@ -78,6 +81,8 @@ final class Assembly {
     private final MapView mapView;
     private final SectionModel section;
     private final Shelf shelf;
+    private final ReviewModel review;
+    private final ReviewPlaces reviewPlaces;
     private final ShellView view;
     private final Scene scene;
 
@@ -120,8 +125,14 @@ final class Assembly {
         folio.plumeMap().changes().addListener((changes, before, after) -> mapView.repaint());
         this.section = new SectionModel(session, outside.tasks(), draft);
         SectionView sectionView = new SectionView(section, shell.theme());
-        this.shelf =
-                new Shelf(List.of(folio.ribbon(), new Shelf.Page("shelf.section", sectionView.bar(), sectionView)));
+        this.review = new ReviewModel(session, outside.tasks(), outside.dialogs());
+        WritingModel writing =
+                new WritingModel(review, outside.tasks(), outside.dialogs(), outside.copies(), outside.opener());
+        this.reviewPlaces = new ReviewPlaces(review, writing, this::liftPage);
+        this.shelf = new Shelf(List.of(
+                folio.ribbon(),
+                new Shelf.Page("shelf.section", sectionView.bar(), sectionView),
+                new Shelf.Page("shelf.review", reviewPlaces.barBelow(), reviewPlaces.below())));
         Slots slots =
                 new Slots(firstPages(), new ShowingBar(map), mapView, Optional.of(folio.pages()), Optional.of(shelf));
         this.view = new ShellView(shell, slots, actions, running, preferences, outside.settings());
@@ -146,6 +157,13 @@ final class Assembly {
             view.lower(handoverPage);
             handoverPage.open();
         })));
+        actions.add(reviewPlaces.actions(this::turnToReview));
+        welcome.whenReview(this::turnToReview);
+        shell.atWelcome().addListener((welcoming, before, after) -> {
+            if (!after) {
+                reviewPlaces.settleBelow();
+            }
+        });
         Magnifier magnifier = new Magnifier(view, view.veil());
         this.scene = new Scene(magnifier, 1280, 800);
         Dress.put(scene, shell.theme(), preferences.size());
@@ -220,6 +238,22 @@ final class Assembly {
         intake.bring(paths);
     }
 
+    /** With an open aquifer the review stands below its map; else the table is looked at by itself, on a page. */
+    private void turnToReview() {
+        if (session.set().get().isEmpty()) {
+            view.lower(reviewPlaces.page());
+        } else {
+            shell.atWelcome().set(false);
+            shelf.open(2);
+            view.showBelow();
+        }
+        reviewPlaces.focus();
+    }
+
+    private void liftPage() {
+        view.lift();
+    }
+
     private void leaveIntake() {
         intake.shown().set(false);
         shell.atWelcome().set(session.set().get().isEmpty());
@@ -227,6 +261,7 @@ final class Assembly {
 
     private void again() {
         folio.again();
+        review.again();
         map.values().again();
     }
 
@@ -276,6 +311,10 @@ final class Assembly {
 
     Session session() {
         return session;
+    }
+
+    ReviewModel review() {
+        return review;
     }
 
     ShellModel shell() {

@@ -7,7 +7,6 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import org.seepledger.fault.DataFault;
-import org.seepledger.io.submission.MappingJson;
 import org.seepledger.io.submission.SubmissionFile;
 import org.seepledger.review.check.Beside;
 import org.seepledger.review.check.Reference;
@@ -31,9 +30,9 @@ final class Reading {
     private final Optional<Reference> reference;
     private final int waterYearStart;
 
-    private Reading(Path file, Optional<Path> mapping, Optional<Reference> reference, int waterYearStart) {
+    private Reading(Path file, Optional<Mapping> corrections, Optional<Reference> reference, int waterYearStart) {
         this.file = file;
-        this.corrections = mapping.map(path -> MappingJson.read(path, path.toString()));
+        this.corrections = corrections;
         this.reference = reference;
         this.waterYearStart = waterYearStart;
     }
@@ -42,13 +41,14 @@ final class Reading {
      * The tables of a file.
      *
      * @param file the file
-     * @param mapping corrections to the guess
+     * @param corrections corrections to the guess
      * @param reference what there is to tie to; empty for nothing
      * @param waterYearStart the month in which a water year begins
      * @throws DataFault if the file cannot be read, or holds no table
      */
-    static List<Submission> of(Path file, Optional<Path> mapping, Optional<Reference> reference, int waterYearStart) {
-        return new Reading(file, mapping, reference, waterYearStart).read();
+    static List<Submission> of(
+            Path file, Optional<Mapping> corrections, Optional<Reference> reference, int waterYearStart) {
+        return new Reading(file, corrections, reference, waterYearStart).read();
     }
 
     private List<Submission> read() {

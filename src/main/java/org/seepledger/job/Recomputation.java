@@ -167,7 +167,7 @@ final class Recomputation implements Reference {
     }
 
     /** The period of ours that a submitted one is, as far as the record covers it. */
-    private Optional<Period> period(When when) {
+    Optional<Period> period(When when) {
         Times times = aquifer.times();
         double first = times.instant(0);
         double last = times.instant(times.intervals());

@@ -22,6 +22,7 @@ import org.seepledger.report.page.ReviewPage;
 import org.seepledger.review.check.Reference;
 import org.seepledger.review.check.Review;
 import org.seepledger.review.check.Severity;
+import org.seepledger.review.mapping.Mapping;
 import org.seepledger.review.mapping.Submission;
 
 /** The review of a submitted budget: reads it, recomputes, holds the two against each other, writes what was found. */
@@ -73,14 +74,17 @@ public final class ReviewJob {
     }
 
     private ReviewOutcome finish(OutputFolder out, Optional<Subject> subject, Optional<Reference> reference) {
-        List<Submission> tables =
-                Reading.of(request.submitted(), request.mapping(), reference, request.waterYearStart());
+        List<Submission> tables = Reading.of(request.submitted(), corrections(), reference, request.waterYearStart());
         Review.Result result = Review.of(tables, reference, request.tolerance());
         stopwatch.lap("reviewing");
         write(out, tables, result, statement(subject));
         List<String> files = out.written();
         out.publish();
         return new ReviewOutcome(ReviewText.summary(result, reference.isPresent()), result.has(Severity.FAULT), files);
+    }
+
+    private Optional<Mapping> corrections() {
+        return request.mapping().map(file -> MappingJson.read(file, file.toString()));
     }
 
     private Statement statement(Optional<Subject> subject) {

@@ -78,10 +78,32 @@ public final class Screenshots {
                 window.robot.interact(window.assembly().view()::showNotices);
                 both(window, folder, "messages", suffix);
                 press(window, javafx.scene.input.KeyCode.ESCAPE);
+                review(window, folder, suffix);
                 solutes(window, folder, suffix);
             }
         }
         System.exit(0);
+    }
+
+    private static void review(OpenWindow window, Path folder, String suffix) throws IOException {
+        Path terrace = Path.of("sample-aquifers/terrace");
+        window.openSet(terrace);
+        window.settle();
+        window.robot.clickOn("#open-review");
+        window.robot.interact(() -> window.assembly().review().bring(terrace.resolve("submitted.csv")));
+        window.await(() -> isFilled(window, "#review-findings"));
+        window.robot.interact(() -> window.robot
+                .lookup("#review-findings")
+                .queryTableView()
+                .getSelectionModel()
+                .select(1));
+        window.settle();
+        for (String part : new String[] {"findings", "mapping", "write"}) {
+            window.robot.clickOn("#review-part-" + part);
+            window.settle();
+            both(window, folder, "review-" + part, suffix);
+        }
+        window.robot.interact(() -> window.assembly().shelf().open(0));
     }
 
     private static void solutes(OpenWindow window, Path folder, String suffix) throws IOException {

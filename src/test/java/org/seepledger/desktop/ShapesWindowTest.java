@@ -16,6 +16,7 @@ import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.seepledger.desktop.map.Camera;
+import org.seepledger.sample.SampleCopy;
 import org.seepledger.sketch.Drawing;
 
 /** Shapes made of others, by hand in the real window: split, merged, with islands and buffers. */
@@ -28,7 +29,7 @@ class ShapesWindowTest {
 
     @BeforeEach
     void open() throws IOException {
-        ValleyCopy.into(folder);
+        SampleCopy.of("valley", folder);
         window = new OpenWindow(1600, 1000);
         window.openSet(folder);
         window.await(() -> window.assembly().map().values().scale().get().isPresent());

@@ -32,6 +32,16 @@ public final class CommandText {
     }
 
     /**
+     * Begins a command that works on what its options name.
+     *
+     * @param name its name
+     * @return it
+     */
+    public static CommandText of(String name) {
+        return new CommandText(name);
+    }
+
+    /**
      * Adds an option.
      *
      * @param option its name

@@ -17,7 +17,7 @@ import javafx.scene.layout.GridPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
-import javafx.util.StringConverter;
+import org.seepledger.desktop.words.ChoiceWords;
 import org.seepledger.desktop.words.Words;
 
 /** A form: a name on the left of each field, what is wrong with it below. */
@@ -68,17 +68,7 @@ final class Fields extends GridPane {
     <T> ChoiceBox<T> choice(String key, List<T> choices, Function<T, String> words, Property<T> chosen) {
         ChoiceBox<T> box = new ChoiceBox<>();
         box.setId(id(key));
-        box.setConverter(new StringConverter<>() {
-            @Override
-            public String toString(T choice) {
-                return choice == null ? "" : words.apply(choice);
-            }
-
-            @Override
-            public T fromString(String text) {
-                throw new UnsupportedOperationException();
-            }
-        });
+        box.setConverter(new ChoiceWords<>(words));
         box.getItems().setAll(choices);
         box.setValue(chosen.getValue());
         box.valueProperty().addListener((value, before, after) -> {

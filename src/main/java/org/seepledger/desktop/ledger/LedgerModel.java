@@ -140,6 +140,7 @@ public final class LedgerModel {
      * @param row the row
      */
     public void light(LedgerRow row) {
+        session.pointed().set(Optional.empty());
         session.lit().set(row.isFace() ? row.item() : "");
     }
 
@@ -171,6 +172,21 @@ public final class LedgerModel {
                 .filter(LedgerRow::isFace)
                 .filter(row -> row.item().equals(item))
                 .findFirst();
+    }
+
+    /** {@return the row that another pane points at, if there is one; where it means all of a group, their heading} */
+    public Optional<LedgerRow> pointed() {
+        return session.pointed()
+                .get()
+                .flatMap(wanted -> rows.stream()
+                        .filter(row ->
+                                row.group() == wanted.group() && row.item().equals(wanted.item()))
+                        .findFirst());
+    }
+
+    /** {@return what another pane points at} */
+    public ReadOnlyObjectProperty<Optional<RowAsked>> pointing() {
+        return session.pointed();
     }
 
     /** {@return the face that is lit up} */

@@ -70,6 +70,7 @@ public final class LedgerView extends BorderPane {
             }
         });
         model.litItem().addListener((item, before, after) -> follow());
+        model.pointing().addListener((row, before, after) -> follow());
         model.rows().addListener((ListChangeListener<LedgerRow>) change -> follow());
         MenuItem origin = new MenuItem(Words.of("ledger.origin"));
         origin.setId("ledger-origin-menu");
@@ -94,10 +95,13 @@ public final class LedgerView extends BorderPane {
                 .forEach(column -> column.setPrefWidth(ofWater ? NUMBER : LONG_NUMBER));
     }
 
-    /** Selects the row of the face that is lit up, and lets go of others. */
+    /** Selects the row of the face that is lit up or that another pane points at, and lets go of other faces. */
     private void follow() {
         following = true;
-        model.lit().ifPresentOrElse(row -> table.getSelectionModel().select(row), this::letGo);
+        model.lit()
+                .or(model::pointed)
+                .ifPresentOrElse(row -> table.getSelectionModel().select(row), this::letGo);
+        model.pointed().ifPresent(table::scrollTo);
         following = false;
     }
 

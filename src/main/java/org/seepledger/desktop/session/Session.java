@@ -40,6 +40,7 @@ public final class Session {
     private final StringProperty lit = new SimpleStringProperty("");
     private final ObjectProperty<List<TracedNumber.Cell>> marked = new SimpleObjectProperty<>(List.of());
     private final ObjectProperty<Optional<RowAsked>> asked = new SimpleObjectProperty<>(Optional.empty());
+    private final ObjectProperty<Optional<RowAsked>> pointed = new SimpleObjectProperty<>(Optional.empty());
     private final StringProperty solute = new SimpleStringProperty("");
     private final StringProperty status = new SimpleStringProperty("");
     private final ObjectProperty<NumberForm> numbers = new SimpleObjectProperty<>(NumberForm.SPACE_POINT);
@@ -74,6 +75,7 @@ public final class Session {
      */
     public void show(Optional<OpenSet> opened) {
         lit.set("");
+        pointed.set(Optional.empty());
         draped.set(Optional.empty());
         sectionLine.set(Optional.empty());
         marked.set(List.of());
@@ -161,6 +163,11 @@ public final class Session {
     /** {@return the row of the selected prism's budget whose origin is asked for; whoever answers empties it} */
     public ObjectProperty<Optional<RowAsked>> asked() {
         return asked;
+    }
+
+    /** {@return the row of the selected prism's budget that a pane points at; the hand that chooses another empties it} */
+    public ObjectProperty<Optional<RowAsked>> pointed() {
+        return pointed;
     }
 
     /** {@return what has been done, what to know, what was refused} */

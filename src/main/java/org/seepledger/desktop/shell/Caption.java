@@ -14,7 +14,10 @@ import org.seepledger.desktop.words.Words;
 /** The line on top: which aquifer, and as a sentence what of it is shown. */
 final class Caption extends HBox {
 
-    Caption(ShellModel model, Node showing, Runnable actions, Runnable handOver) {
+    /** Where room is short, a long name gives way first. */
+    private static final double LEAST_NAME = 96;
+
+    Caption(ShellModel model, Node showing, Runnable actions, Runnable review, Runnable handOver) {
         getStyleClass().add("sl-caption");
         Button name = button("", model::turnPage, "caption.name.tip");
         name.setId("set-name");
@@ -23,15 +26,25 @@ final class Caption extends HBox {
                 .set()
                 .addListener((set, before, after) -> name.setText(model.name().orElse("")));
         name.setText(model.name().orElse(""));
-        name.setMinWidth(USE_PREF_SIZE);
+        name.setMinWidth(LEAST_NAME);
         Region gap = new Region();
         setHgrow(gap, Priority.ALWAYS);
         Label mark = new Label("≋");
         mark.getStyleClass().add("sl-mark");
         Button over = button(Words.of("caption.handover"), handOver, "action.handover");
         over.setId("hand-over");
+        Button submitted = button(Words.of("caption.review"), review, "action.review");
+        submitted.setId("open-review");
         getChildren()
-                .addAll(mark, name, showing, gap, over, theme(model), button(Words.of("caption.actions"), actions, ""));
+                .addAll(
+                        mark,
+                        name,
+                        showing,
+                        gap,
+                        submitted,
+                        over,
+                        theme(model),
+                        button(Words.of("caption.actions"), actions, ""));
     }
 
     /** Adds a button before the last two. */

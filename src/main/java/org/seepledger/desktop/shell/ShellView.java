@@ -54,6 +54,12 @@ public final class ShellView extends StackPane {
     /** How high the section is at first. */
     private static final double[] SECTION = {290, 0.36};
 
+    /** How high the review is at first. */
+    private static final double[] REVIEW = {330, 0.4};
+
+    private static final double[][] HEIGHTS = {BELOW, SECTION, REVIEW};
+    private static final String[] HEIGHT_KEYS = {"below.height", "section.height", "review.height"};
+
     private final ShellModel model;
     private final Actions actions;
     private final Slots slots;
@@ -104,8 +110,12 @@ public final class ShellView extends StackPane {
         across.getItems().add(slots.map());
         this.side = slots.ledger().map(pane -> new Fold(across, pane, SIDE[0], SIDE[1], settings, "side.width"));
         this.below = slots.ribbon().map(pane -> new Fold(down, pane, BELOW[0], BELOW[1], settings, "below.height"));
-        Caption caption =
-                new Caption(model, slots.showing(), this::showActions, () -> actions.perform("action.handover"));
+        Caption caption = new Caption(
+                model,
+                slots.showing(),
+                this::showActions,
+                () -> actions.perform("action.review"),
+                () -> actions.perform("action.handover"));
         side.ifPresent(fold -> caption.add(fold.button("fold-side", "action.fold.side")));
         below.ifPresent(fold -> caption.add(fold.button("fold-below", "action.fold.below")));
         work.setTop(caption);
@@ -186,13 +196,13 @@ public final class ShellView extends StackPane {
     /**
      * Gives the pane below the map a height for each of its pages.
      *
-     * @param page which page is open: 0 for time, 1 for the section
+     * @param page which page is open: 0 for time, 1 for the section, 2 for the review
      */
     public void spreadBelow(ObservableValue<Number> page) {
         page.addListener((open, before, after) -> below.ifPresent(fold -> {
-            double[] size = after.intValue() == 0 ? BELOW : SECTION;
+            double[] size = HEIGHTS[after.intValue()];
             fold.show();
-            fold.take(after.intValue() == 0 ? "below.height" : "section.height", size[0], size[1]);
+            fold.take(HEIGHT_KEYS[after.intValue()], size[0], size[1]);
         }));
     }
 

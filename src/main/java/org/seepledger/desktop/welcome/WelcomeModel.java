@@ -35,6 +35,7 @@ public final class WelcomeModel {
     private final ObservableList<Place> recent = FXCollections.observableArrayList();
     private final ReadOnlyObjectWrapper<Optional<Broken>> failed = new ReadOnlyObjectWrapper<>(Optional.empty());
     private Consumer<List<Path>> loose = paths -> {};
+    private Runnable review = () -> {};
     private Consumer<Path> wrong = folder -> {};
     private final ReadOnlyObjectWrapper<PaneState> state = new ReadOnlyObjectWrapper<>(PaneState.READY);
 
@@ -141,6 +142,20 @@ public final class WelcomeModel {
      */
     public void whenLoose(Consumer<List<Path>> taker) {
         loose = taker;
+    }
+
+    /**
+     * Says where a submitted budget is reviewed.
+     *
+     * @param turn turns there
+     */
+    public void whenReview(Runnable turn) {
+        review = turn;
+    }
+
+    /** Goes to where a submitted budget is reviewed. */
+    void review() {
+        review.run();
     }
 
     /** Goes to where loose files are made into an aquifer folder. */

@@ -159,9 +159,12 @@ public final class WelcomeView extends StackPane {
         Button bring = new Button(Words.of("welcome.loose"));
         bring.setId("bring-loose");
         bring.setOnAction(pressed -> model.bringLoose());
+        Button review = new Button(Words.of("welcome.review"));
+        review.setId("welcome-review");
+        review.setOnAction(pressed -> model.review());
         HBox buttons = new HBox(10, choose, bring);
         buttons.setAlignment(Pos.CENTER);
-        drop.getChildren().addAll(words, buttons);
+        drop.getChildren().addAll(words, buttons, review);
         return drop;
     }
 

@@ -9,7 +9,7 @@ import java.util.Optional;
 /**
  * How a table is read.
  *
- * @param header the header line, from 0
+ * @param header the header line, from 0; below 0 to find it out
  * @param decimal the decimal sign; empty to find it out
  * @param unit the unit of figures that no column, cell or heading gives one; empty for none
  * @param columns its columns, from the left
@@ -25,6 +25,9 @@ public record Mapping(
         Map<String, Tie> terms,
         Map<String, String> areas,
         Map<String, String> periods) {
+
+    /** Nothing said: all is guessed. */
+    public static final Mapping NONE = new Mapping(-1, Optional.empty(), "", List.of(), Map.of(), Map.of(), Map.of());
 
     /** Copies the collections. */
     public Mapping {

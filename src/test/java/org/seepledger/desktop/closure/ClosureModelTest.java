@@ -9,11 +9,11 @@ import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.seepledger.balance.Periods;
-import org.seepledger.desktop.ValleyCopy;
 import org.seepledger.desktop.budget.LiveSet;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.task.DirectTasks;
 import org.seepledger.report.Answer;
+import org.seepledger.sample.SampleCopy;
 
 class ClosureModelTest {
 
@@ -64,7 +64,7 @@ class ClosureModelTest {
 
     @Test
     void thePeriodShownHasCellsOfItsOwn(@TempDir Path folder) throws IOException {
-        ValleyCopy.into(folder);
+        SampleCopy.of("valley", folder);
         Path described = folder.resolve("aquifer.json");
         Files.writeString(described, Files.readString(described).replace("\"specific_yield.tif\"", "0.02"));
         try (LiveSet wrong = LiveSet.of(folder)) {

@@ -10,11 +10,11 @@ import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
-import org.seepledger.desktop.ValleyCopy;
 import org.seepledger.desktop.port.GivenAnswers;
 import org.seepledger.desktop.session.Opening;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.task.DirectTasks;
+import org.seepledger.sample.SampleCopy;
 import org.seepledger.sketch.Drawing;
 import org.seepledger.sketch.Limit;
 import org.seepledger.sketch.Reach;
@@ -35,7 +35,7 @@ class CardTest {
 
     @BeforeEach
     void open() throws IOException {
-        ValleyCopy.into(folder);
+        SampleCopy.of("valley", folder);
         opening = Opening.of(folder);
         session.show(Optional.of(opening.set()));
         files.begin(opening);

@@ -12,7 +12,6 @@ import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
-import org.seepledger.desktop.ValleyCopy;
 import org.seepledger.desktop.map.Aim;
 import org.seepledger.desktop.map.Camera;
 import org.seepledger.desktop.map.Touch;
@@ -21,6 +20,7 @@ import org.seepledger.desktop.session.Opening;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.task.DirectTasks;
 import org.seepledger.prism.VerticalRange;
+import org.seepledger.sample.SampleCopy;
 import org.seepledger.sketch.Drawing;
 import org.seepledger.sketch.Place;
 import org.seepledger.sketch.RingAt;
@@ -40,7 +40,7 @@ class DraftTest {
 
     @BeforeEach
     void open() throws IOException {
-        ValleyCopy.into(folder);
+        SampleCopy.of("valley", folder);
         reopen();
     }
 
@@ -48,7 +48,7 @@ class DraftTest {
         Opening opening = Opening.of(folder);
         opened.add(opening);
         session.show(Optional.of(opening.set()));
-        session.wells().set(opening.set().workbench().wells(0));
+        session.wells().set(opening.set().workbench().views().wells(0));
         files.begin(opening);
     }
 
@@ -226,7 +226,8 @@ class DraftTest {
 
     @Test
     void aCircleStandsOnTheWellThatIsClicked() {
-        var well = session.set().get().orElseThrow().workbench().wells(0).get(0);
+        var well =
+                session.set().get().orElseThrow().workbench().views().wells(0).get(0);
         model.choose(Tool.CIRCLE);
         click(well.x() + 7, well.y() - 5);
         hand.type("120");

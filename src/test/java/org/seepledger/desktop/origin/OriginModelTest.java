@@ -167,6 +167,7 @@ class OriginModelTest {
                 .set(new DrawnShapes(
                         live.set
                                 .workbench()
+                                .drawings()
                                 .drawing(live.set.path().resolve("prisms.geojson"))
                                 .drawing(),
                         true));
