@@ -59,7 +59,7 @@ final class BalanceCommand implements Callable<Integer> {
     public Integer call() {
         limit.check();
         Choices.measure("--mass-unit", massUnit, "kg");
-        BalanceOutcome outcome = BalanceJob.run(request(), terminal.progress(options.progress()));
+        BalanceOutcome outcome = BalanceJob.run(request(), options.progress(terminal));
         result.tell(terminal.out(), outcome.summary(), outcome.files());
         return limit.status(outcome.worstClosureError(), terminal.out());
     }

@@ -5,8 +5,10 @@ import java.util.Optional;
 import org.seepledger.balance.Periods;
 import org.seepledger.balance.WellRule;
 import org.seepledger.fault.UsageFault;
+import org.seepledger.progress.Progress;
 import org.seepledger.unit.Measure;
 import picocli.CommandLine.ArgGroup;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 
 /** The options that change what a row of a budget comes to. */
@@ -51,14 +53,8 @@ final class BudgetOptions {
             description = "Cut prisms at the grid's edge instead of refusing those that reach beyond it.")
     private boolean clip;
 
-    @Option(names = "--threads", paramLabel = "N", description = "How many threads may work (default: all processors).")
-    private int threads = Runtime.getRuntime().availableProcessors();
-
-    @Option(
-            names = "--progress",
-            negatable = true,
-            description = "Print progress to standard error (default: if a terminal is attached).")
-    private Boolean progress;
+    @Mixin
+    private WorkOptions work = new WorkOptions();
 
     Periods.Every every() {
         return Choices.choice("--every", dates.every, Periods.Every.class);
@@ -93,10 +89,11 @@ final class BudgetOptions {
     }
 
     int threads() {
-        return Choices.threads(threads);
+        return work.threads();
     }
 
-    Boolean progress() {
-        return progress;
+    /** Where progress is told, if it is. */
+    Progress progress(Terminal terminal) {
+        return work.progress(terminal);
     }
 }

@@ -6,6 +6,7 @@ import java.util.concurrent.Callable;
 import org.seepledger.job.CompareJob;
 import org.seepledger.job.CompareRequest;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 
@@ -48,14 +49,8 @@ final class CompareCommand implements Callable<Integer> {
     @Option(names = "--overwrite", description = "Replace the files that an earlier comparison wrote to DIR.")
     private boolean overwrite;
 
-    @Option(names = "--threads", paramLabel = "N", description = "How many threads may work (default: all processors).")
-    private int threads = Runtime.getRuntime().availableProcessors();
-
-    @Option(
-            names = "--progress",
-            negatable = true,
-            description = "Print progress to standard error (default: if a terminal is attached).")
-    private Boolean progress;
+    @Mixin
+    private WorkOptions work = new WorkOptions();
 
     CompareCommand(Terminal terminal) {
         this.terminal = terminal;
@@ -63,9 +58,9 @@ final class CompareCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        CompareRequest request = new CompareRequest(
-                first, second, out, Choices.threads(threads), overwrite, LocalDate.now(terminal.clock()));
-        terminal.out().print(CompareJob.run(request, terminal.progress(progress)));
+        CompareRequest request =
+                new CompareRequest(first, second, out, work.threads(), overwrite, LocalDate.now(terminal.clock()));
+        terminal.out().print(CompareJob.run(request, work.progress(terminal)));
         return 0;
     }
 }

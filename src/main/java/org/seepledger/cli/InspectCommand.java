@@ -4,7 +4,7 @@ import java.nio.file.Path;
 import java.util.concurrent.Callable;
 import org.seepledger.job.InspectJob;
 import picocli.CommandLine.Command;
-import picocli.CommandLine.Option;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Parameters;
 
 /** {@code seepledger inspect}. */
@@ -27,14 +27,8 @@ final class InspectCommand implements Callable<Integer> {
     @Parameters(paramLabel = "AQUIFER", description = "The folder with aquifer.json.")
     private Path aquifer;
 
-    @Option(names = "--threads", paramLabel = "N", description = "How many threads may work (default: all processors).")
-    private int threads = Runtime.getRuntime().availableProcessors();
-
-    @Option(
-            names = "--progress",
-            negatable = true,
-            description = "Print progress to standard error (default: if a terminal is attached).")
-    private Boolean progress;
+    @Mixin
+    private WorkOptions work = new WorkOptions();
 
     InspectCommand(Terminal terminal) {
         this.terminal = terminal;
@@ -42,7 +36,7 @@ final class InspectCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        terminal.out().print(InspectJob.run(aquifer, Choices.threads(threads), terminal.progress(progress)));
+        terminal.out().print(InspectJob.run(aquifer, work.threads(), work.progress(terminal)));
         return 0;
     }
 }

@@ -80,7 +80,7 @@ final class PlumeCommand implements Callable<Integer> {
     @Override
     public Integer call() {
         limit.check();
-        PlumeOutcome outcome = PlumeJob.run(request(), terminal.progress(options.progress()));
+        PlumeOutcome outcome = PlumeJob.run(request(), options.progress(terminal));
         result.tell(terminal.out(), outcome.summary(), outcome.files());
         return limit.status(outcome.worstClosureError(), terminal.out());
     }

@@ -9,6 +9,7 @@ import org.seepledger.job.ReviewJob;
 import org.seepledger.job.ReviewOutcome;
 import org.seepledger.job.ReviewRequest;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 
@@ -92,14 +93,8 @@ final class ReviewCommand implements Callable<Integer> {
             description = "Cut prisms at the grid's edge instead of refusing those that reach beyond it.")
     private boolean clip;
 
-    @Option(names = "--threads", paramLabel = "N", description = "How many threads may work (default: all processors).")
-    private int threads = Runtime.getRuntime().availableProcessors();
-
-    @Option(
-            names = "--progress",
-            negatable = true,
-            description = "Print progress to standard error (default: if a terminal is attached).")
-    private Boolean progress;
+    @Mixin
+    private WorkOptions work = new WorkOptions();
 
     ReviewCommand(Terminal terminal) {
         this.terminal = terminal;
@@ -107,7 +102,7 @@ final class ReviewCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        ReviewOutcome outcome = ReviewJob.run(request(), terminal.progress(progress));
+        ReviewOutcome outcome = ReviewJob.run(request(), work.progress(terminal));
         terminal.out().print(outcome.summary());
         terminal.out().println("Written to " + out + ": " + String.join(", ", outcome.files()));
         return outcome.fault() ? FAULT_FOUND : 0;
@@ -130,7 +125,7 @@ final class ReviewCommand implements Callable<Integer> {
                 wholeCells,
                 waterYearStart,
                 clip,
-                Choices.threads(threads),
+                work.threads(),
                 overwrite,
                 LocalDate.now(terminal.clock()));
     }

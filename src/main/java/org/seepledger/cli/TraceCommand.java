@@ -88,7 +88,7 @@ final class TraceCommand implements Callable<Integer> {
         if (solute == null && dispersion) {
             throw new UsageFault("--dispersion goes with --solute: water does not disperse.");
         }
-        Progress progress = terminal.progress(options.progress());
+        Progress progress = options.progress(terminal);
         terminal.out()
                 .print(
                         solute == null

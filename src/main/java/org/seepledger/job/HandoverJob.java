@@ -110,10 +110,10 @@ public final class HandoverJob {
     private void writePrisms(OutputFolder out, StandIns standIns) throws IOException {
         Path copy = out.file(HandoverRequest.PRISMS);
         if (!request.readsOwnPrisms()) {
-            set.mustHold(request.prisms(), request.drawing());
+            set.drawings().mustHold(request.prisms(), request.drawing());
             Files.copy(request.prisms(), copy);
         } else {
-            set.write(copy, request.drawing());
+            set.drawings().write(copy, request.drawing());
             standIns.put(copy, request.prisms());
         }
         DataFolder beside = set.besides();

@@ -55,7 +55,7 @@ final class MapOnPaper {
     }
 
     private MapPicture.Ground ground(Window window) {
-        GridLayer layer = set.layer(asked.quantity(), asked.layer(), asked.interval(), window, 1, progress);
+        GridLayer layer = set.views().layer(asked.quantity(), asked.layer(), asked.interval(), window, 1, progress);
         Drape drape = Drape.of(set.aquifer().grid(), window, MOST_CELLS, row -> {
             double[] values = new double[window.columns()];
             System.arraycopy(layer.values(), (row - window.row()) * window.columns(), values, 0, window.columns());

@@ -21,8 +21,6 @@ import org.seepledger.balance.Trace;
 import org.seepledger.balance.WellRule;
 import org.seepledger.io.aquifer.AquiferFolder;
 import org.seepledger.io.prisms.PrismsReader;
-import org.seepledger.io.prisms.TransectsReader;
-import org.seepledger.io.prisms.TransectsWriter;
 import org.seepledger.io.result.MassUnits;
 import org.seepledger.io.table.MeasuredPanels;
 import org.seepledger.ledger.Period;
@@ -277,30 +275,6 @@ public final class SoluteBench {
         }
         int layers = aquifer().layers().size();
         return new Prism(name, List.of(new Ring(1, 0, sides)), new VerticalRange.Layers(0, layers - 1));
-    }
-
-    /**
-     * {@return the transects of a file; none where it has none}
-     *
-     * @param file a GeoJSON file of LineStrings
-     * @throws org.seepledger.fault.DataFault if anything in it is wrong
-     */
-    public List<Transect> transects(Path file) {
-        return gate.ask(
-                Progress.NONE,
-                until ->
-                        new TransectsReader(folder.crs(), aquifer().grid(), note -> {}).asDrawn(file, file.toString()));
-    }
-
-    /**
-     * Writes transects as the command reads them; the file appears whole or not at all.
-     *
-     * @param file the file, which is replaced if it exists
-     * @param transects the transects
-     * @throws org.seepledger.fault.UsageFault if it cannot be written
-     */
-    public void write(Path file, List<Transect> transects) {
-        TransectsWriter.write(file, folder.crs().name(), transects);
     }
 
     /**

@@ -18,6 +18,7 @@ final class SectionDrawing {
     private static final double HINT = 0.3;
 
     private static final double SMALL = SectionSheet.SMALL;
+    private static final Fill NONE = new Fill(Ink.Token.TEXT, 0, Texture.PLAIN);
     private static final double LID_REACH = 12;
     private static final double LID_WIDTH = 5;
 
@@ -44,13 +45,10 @@ final class SectionDrawing {
         drawLayers();
         sheet.level(section.profile().stretches(), stretch -> stretch.column().levelBefore(), SectionKey.AT_BEGIN);
         sheet.level(section.profile().stretches(), stretch -> stretch.column().level(), SectionKey.AT_END);
-        for (Body body : section.bodies()) {
-            if (!body.name().equals(section.light().prism())) {
-                sheet.body(body.slabs(), fill(0.3), Optional.of(Stroke.of(Ink.Token.PRISM, 1)));
-            }
-        }
-        section.body()
-                .ifPresent(body -> sheet.body(body.slabs(), fill(0.5), Optional.of(Stroke.of(Ink.Token.PRISM, 2))));
+        section.bodies().stream()
+                .filter(body -> !body.name().equals(section.light().prism()))
+                .forEach(body -> drawBody(body, 0.4, 1));
+        section.body().ifPresent(body -> drawBody(body, 0.6, 2));
         section.body().ifPresent(this::drawLit);
         section.wells().forEach(this::drawWell);
         section.body().ifPresent(body -> {
@@ -81,9 +79,12 @@ final class SectionDrawing {
                 : Optional.empty();
     }
 
-    /** Over colours, which have a meaning, a body is but hinted at. */
-    private Fill fill(double opacity) {
-        return new Fill(Ink.Token.PRISM, section.colours().isPresent() ? HINT * opacity : opacity, Texture.RISING);
+    /** Over colours, which have a meaning, a body is but hinted at; its outline has a rim of paper to stand out from them. */
+    private void drawBody(Body body, double opacity, double width) {
+        double share = section.colours().isPresent() ? HINT * opacity : opacity;
+        Fill hatch = new Fill(Ink.Token.PRISM, share, Texture.RISING);
+        sheet.body(body.slabs(), hatch, Optional.of(Stroke.of(Ink.Token.PAPER, width + 2)));
+        sheet.body(body.slabs(), NONE, Optional.of(Stroke.of(Ink.Token.PRISM, width)));
     }
 
     private String description() {
@@ -98,9 +99,8 @@ final class SectionDrawing {
         for (int layer = 0; layer < section.layers().size(); layer++) {
             List<Slab> slabs = slabs(layer, false);
             if (section.colours().isPresent()) {
-                Fill none = new Fill(Ink.Token.TEXT, 0, Texture.PLAIN);
-                sheet.body(slabs, none, Optional.of(Stroke.of(Ink.Token.PAPER, 1.8)));
-                sheet.body(slabs, none, Optional.of(Stroke.of(Ink.Token.TEXT, 0.7)));
+                sheet.body(slabs, NONE, Optional.of(Stroke.of(Ink.Token.PAPER, 1.8)));
+                sheet.body(slabs, NONE, Optional.of(Stroke.of(Ink.Token.TEXT, 0.7)));
             } else {
                 Fill shade = new Fill(Ink.Token.TEXT, layer % 2 == 0 ? 0.05 : 0.13, Texture.PLAIN);
                 sheet.body(slabs, shade, Optional.of(Stroke.of(Ink.Token.MUTED, 0.6)));

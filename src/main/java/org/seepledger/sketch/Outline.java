@@ -91,22 +91,6 @@ public record Outline(List<Corner> corners) {
     }
 
     /**
-     * {@return the outline with both ends of a side moved}
-     *
-     * @param side the side, from 0
-     * @param dx how far along x, in plan units
-     * @param dy how far along y
-     * @throws Refusal if fewer than three vertices would be left
-     */
-    public Outline moveSide(int side, double dx, double dy) {
-        return with(list -> {
-            for (int end : new int[] {side, (side + 1) % size()}) {
-                list.set(end, list.get(end).to(place(end).moved(dx, dy)));
-            }
-        });
-    }
-
-    /**
      * {@return the outline with a new vertex in a side; both halves stay in the side's boundary}
      *
      * @param side the side, from 0; the vertex becomes number {@code side + 1}

@@ -50,7 +50,8 @@ class HelpTest {
             arguments.remove(0);
             int out = arguments.indexOf("--out") + 1;
             if (out > 0) {
-                arguments.set(out, folder.resolve("out").toString());
+                arguments.set(
+                        out, folder.resolve("out " + examples.indexOf(example)).toString());
             }
             Ran ran = Ran.of(arguments.toArray(String[]::new));
             assertThat(ran.err()).as(example).isEmpty();

@@ -8,7 +8,6 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
-import java.util.stream.Stream;
 import javafx.scene.control.Label;
 import javafx.scene.control.TableView;
 import javafx.scene.input.KeyCode;
@@ -20,6 +19,7 @@ import org.seepledger.balance.Periods;
 import org.seepledger.desktop.OpenWindow;
 import org.seepledger.desktop.ledger.Arrangement;
 import org.seepledger.job.TracedNumber;
+import org.seepledger.sample.SampleCopy;
 
 /** What the window tells of where a number comes from is what the command tells. */
 class OriginTest {
@@ -31,11 +31,7 @@ class OriginTest {
 
     @BeforeEach
     void open() throws IOException {
-        try (Stream<Path> files = Files.list(Path.of("sample-aquifers/valley"))) {
-            for (Path file : files.toList()) {
-                Files.copy(file, folder.resolve(file.getFileName()));
-            }
-        }
+        SampleCopy.of("valley", folder);
         window = new OpenWindow(1600, 1000);
         window.openSet(folder);
         window.await(() -> !window.robot

@@ -17,6 +17,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.seepledger.desktop.ledger.Arrangement;
 import org.seepledger.desktop.session.Opening;
+import org.seepledger.sample.SampleCopy;
 import org.seepledger.sketch.Drawing;
 import org.seepledger.sketch.Place;
 import org.seepledger.sketch.RingAt;
@@ -31,7 +32,7 @@ class DrawingWindowTest {
 
     @BeforeEach
     void open() throws IOException {
-        OpenWindow.copy(Path.of("sample-aquifers/valley"), folder);
+        SampleCopy.of("valley", folder);
         window = new OpenWindow(1600, 1000);
         openSet();
     }

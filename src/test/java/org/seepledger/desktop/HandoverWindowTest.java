@@ -12,6 +12,7 @@ import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import javafx.scene.control.CheckBox;
 import javafx.scene.control.Label;
+import javafx.scene.control.Labeled;
 import javafx.scene.control.TextField;
 import javafx.scene.input.KeyCode;
 import org.junit.jupiter.api.AfterEach;
@@ -88,13 +89,13 @@ class HandoverWindowTest {
         window.robot.interact(() -> out.setText(folder.toString()));
         window.await(() -> window.robot
                 .lookup(".sl-warning")
-                .match((Label label) -> label.isVisible() && label.getText().contains("is not empty"))
+                .match(node -> node.isVisible() && ((Labeled) node).getText().contains("is not empty"))
                 .tryQuery()
                 .isPresent());
         window.robot.interact(() -> out.setText(folder.resolve("mine.txt").toString()));
         window.await(() -> window.robot
                 .lookup(".sl-warning")
-                .match((Label label) -> label.isVisible() && label.getText().contains("is a file"))
+                .match(node -> node.isVisible() && ((Labeled) node).getText().contains("is a file"))
                 .tryQuery()
                 .isPresent());
         assertThat(List.of(folder.toFile().list())).containsExactly("mine.txt");

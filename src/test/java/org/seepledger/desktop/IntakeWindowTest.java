@@ -23,6 +23,7 @@ import org.seepledger.intake.LooseValley;
 import org.seepledger.job.BalanceJob;
 import org.seepledger.job.Requests;
 import org.seepledger.progress.Progress;
+import org.seepledger.sample.SampleCopy;
 
 /** The import assistant in the real window. */
 class IntakeWindowTest {
@@ -165,12 +166,7 @@ class IntakeWindowTest {
     @Test
     void aFolderWithAWrongDescriptionIsMendedAndOpened() throws IOException {
         Path set = folder.resolve("valley");
-        Files.createDirectories(set);
-        try (var files = Files.list(VALLEY)) {
-            for (Path file : files.toList()) {
-                Files.copy(file, set.resolve(file.getFileName()));
-            }
-        }
+        SampleCopy.of("valley", set);
         String sound = Files.readString(set.resolve("aquifer.json"));
         String wrong =
                 sound.replace("\"rock.tif\"", "\"rok.tif\"").replace("\"kind\": \"areal\"", "\"kind\": \"aerial\"");

@@ -18,6 +18,7 @@ import org.junit.jupiter.api.io.TempDir;
 import org.seepledger.balance.Periods;
 import org.seepledger.desktop.draw.Tool;
 import org.seepledger.desktop.session.Opening;
+import org.seepledger.sample.SampleCopy;
 import org.seepledger.sketch.Drawing;
 import org.seepledger.sketch.Reach;
 
@@ -72,7 +73,7 @@ class KeyboardWalkTest {
 
     @Test
     void theWholeJobIsDoneByKeys() throws IOException {
-        copySample();
+        SampleCopy.of("valley", folder);
         openWindow();
         openTheCard();
         drawAPrism();
@@ -81,14 +82,6 @@ class KeyboardWalkTest {
         readTheAnswers();
         save();
         handOver();
-    }
-
-    private void copySample() throws IOException {
-        try (var sample = Files.list(Path.of("sample-aquifers/valley"))) {
-            for (Path file : sample.toList()) {
-                Files.copy(file, folder.resolve(file.getFileName()));
-            }
-        }
     }
 
     private void openWindow() {

@@ -13,6 +13,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.Timeout;
 import org.junit.jupiter.api.io.TempDir;
 import org.seepledger.desktop.session.Opening;
+import org.seepledger.sample.SampleCopy;
 import org.seepledger.sketch.Drawing;
 
 /** Kills the process of a window that has unsaved prisms. */
@@ -25,14 +26,6 @@ class KillTest {
 
     @TempDir
     private Path logs;
-
-    private void copySample() throws IOException {
-        try (var sample = Files.list(Path.of("sample-aquifers/valley"))) {
-            for (Path file : sample.toList()) {
-                Files.copy(file, folder.resolve(file.getFileName()));
-            }
-        }
-    }
 
     private void drawAndBeKilled() throws IOException, InterruptedException {
         Path log = logs.resolve("killed.txt");
@@ -53,7 +46,7 @@ class KillTest {
     @Test
     @Timeout(180)
     void whatWasDrawnIsBackBitForBitAndCanBeUndone() throws IOException, InterruptedException {
-        copySample();
+        SampleCopy.of("valley", folder);
         byte[] saved = Files.readAllBytes(folder.resolve(Opening.PRISMS));
         drawAndBeKilled();
         assertThat(Files.readAllBytes(folder.resolve(Opening.PRISMS))).isEqualTo(saved);

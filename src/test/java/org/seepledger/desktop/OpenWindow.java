@@ -1,13 +1,10 @@
 package org.seepledger.desktop;
 
-import java.io.IOException;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.concurrent.Callable;
 import java.util.concurrent.TimeUnit;
 import java.util.function.BooleanSupplier;
-import java.util.stream.Stream;
 import javafx.application.Platform;
 import javafx.geometry.Bounds;
 import javafx.geometry.Point2D;
@@ -116,15 +113,6 @@ public final class OpenWindow implements AutoCloseable {
     /** Presses keys together, and lets them go. */
     void type(KeyCode... keys) {
         robot.press(keys).release(keys);
-    }
-
-    /** Copies a sample, to be changed. */
-    static void copy(Path sample, Path folder) throws IOException {
-        try (Stream<Path> files = Files.list(sample)) {
-            for (Path file : files.toList()) {
-                Files.copy(file, folder.resolve(file.getFileName()));
-            }
-        }
     }
 
     /** Lets the window come to rest. */

@@ -82,6 +82,12 @@ class RunningWindowTest {
         window.await(() -> !node("#running").isVisible());
     }
 
+    private List<Button> stops() {
+        return window.robot.from(node("#running-list")).lookup(".button").<Button>queryAll().stream()
+                .filter(button -> button.getText().equals("Stop"))
+                .toList();
+    }
+
     @Test
     void severalWorksAreListedEachWithItsOwnStop() {
         AtomicBoolean first = slowJob("task.files");
@@ -89,14 +95,12 @@ class RunningWindowTest {
         AtomicBoolean second = slowJob("task.opening");
         window.await(() -> strip().endsWith("and 1 more"));
         type(KeyCode.F10);
-        List<Button> stops = window.robot.from(node("#running-list")).lookup(".button").<Button>queryAll().stream()
-                .filter(button -> button.getText().equals("Stop"))
-                .toList();
-        assertThat(stops).hasSize(2);
-        window.robot.clickOn(stops.get(1));
+        assertThat(stops()).hasSize(2);
+        window.robot.clickOn(stops().get(1));
         window.await(second::get);
         assertThat(first).isFalse();
-        window.robot.clickOn(stops.get(0));
+        window.await(() -> stops().size() == 1);
+        window.robot.clickOn(stops().get(0));
         window.await(first::get);
         window.await(() ->
                 window.robot.lookup("Nothing is being worked on.").tryQuery().isPresent());

@@ -20,6 +20,7 @@ import org.seepledger.desktop.ledger.Arrangement;
 import org.seepledger.picture.Body;
 import org.seepledger.picture.Section;
 import org.seepledger.picture.SectionFrame;
+import org.seepledger.sample.SampleCopy;
 import org.seepledger.sketch.Drawing;
 import org.seepledger.sketch.Lid;
 import org.seepledger.sketch.Limit;
@@ -35,7 +36,7 @@ class SectionWindowTest {
 
     @BeforeEach
     void open() throws IOException {
-        OpenWindow.copy(Path.of("sample-aquifers/valley"), folder);
+        SampleCopy.of("valley", folder);
         window = new OpenWindow(1600, 1000);
         window.openSet(folder);
         window.await(() -> window.assembly().map().values().scale().get().isPresent());

@@ -20,6 +20,7 @@ import org.seepledger.desktop.session.Opening;
 import org.seepledger.job.PlumeJob;
 import org.seepledger.job.Requests;
 import org.seepledger.progress.Progress;
+import org.seepledger.sample.SampleCopy;
 import org.seepledger.sketch.ControlLine;
 import org.seepledger.sketch.Place;
 import org.seepledger.sketch.RingAt;
@@ -34,7 +35,7 @@ class SoluteWindowTest {
 
     @BeforeEach
     void open() throws IOException {
-        OpenWindow.copy(Path.of("sample-aquifers/depot"), folder);
+        SampleCopy.of("depot", folder);
         window = new OpenWindow(1600, 1000);
         show(folder);
     }

@@ -44,7 +44,7 @@ class ConcentrationReadingTest {
     }
 
     private static MapQuantity quantity(Workbench bench, MapQuantity.Kind kind) {
-        return bench.quantities().stream()
+        return bench.views().quantities().stream()
                 .filter(each -> each.kind() == kind)
                 .findFirst()
                 .orElseThrow();
@@ -54,7 +54,7 @@ class ConcentrationReadingTest {
         try (Workbench bench = open()) {
             MapQuantity quantity = quantity(bench, kind);
             assertThat(quantity.unit()).isEqualTo("ug/L");
-            return bench.layer(quantity, 0, 0, bench.aquifer().grid().window(), stride, Progress.NONE);
+            return bench.views().layer(quantity, 0, 0, bench.aquifer().grid().window(), stride, Progress.NONE);
         }
     }
 
@@ -77,7 +77,7 @@ class ConcentrationReadingTest {
         try (Workbench bench = open()) {
             SectionLine line = new SectionLine(List.of(new Place(0, 0.5), new Place(4, 0.5)));
             Optional<MapQuantity> quantity = Optional.of(quantity(bench, MapQuantity.Kind.CONCENTRATION));
-            Profile profile = bench.profile(line, quantity, 0, Progress.NONE);
+            Profile profile = bench.views().profile(line, quantity, 0, Progress.NONE);
             double[] along = profile.stretches().stream()
                     .mapToDouble(stretch -> stretch.column().values()[0])
                     .toArray();

@@ -38,7 +38,7 @@ class HandoverJobTest {
         SmallSets.heads(set);
         out = folder.resolve("deep/out");
         bench = Workbench.open(set);
-        drawing = bench.drawing(set.resolve("prisms.geojson")).drawing();
+        drawing = bench.drawings().drawing(set.resolve("prisms.geojson")).drawing();
     }
 
     @AfterEach
@@ -97,7 +97,8 @@ class HandoverJobTest {
                         "run.json",
                         "surfaces/lid.tif");
         assertThat(files(out).keySet()).containsAll(outcome.files());
-        assertThat(bench.drawing(out.resolve("prisms.geojson")).drawing()).isEqualTo(drawing);
+        assertThat(bench.drawings().drawing(out.resolve("prisms.geojson")).drawing())
+                .isEqualTo(drawing);
         assertThat(out.resolve("pictures/map a-b.svg"))
                 .content()
                 .contains("Map of a/b with the flow through its faces", "determination of compliance", "local coordin");

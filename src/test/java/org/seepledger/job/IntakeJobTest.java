@@ -29,6 +29,7 @@ import org.seepledger.io.aquifer.AquiferReader;
 import org.seepledger.io.result.FileRecord;
 import org.seepledger.progress.Cancelled;
 import org.seepledger.progress.Progress;
+import org.seepledger.sample.SampleCopy;
 
 class IntakeJobTest {
 
@@ -149,14 +150,7 @@ class IntakeJobTest {
     @Test
     void filesWhoseNamesCountAsTheyMustAreDescribedWhereTheyLie() throws IOException {
         Path place = folder.resolve("place");
-        Files.createDirectories(place);
-        try (Stream<Path> files = Files.list(VALLEY)) {
-            for (Path file : files.toList()) {
-                if (!file.endsWith("aquifer.json")) {
-                    Files.copy(file, place.resolve(file.getFileName()));
-                }
-            }
-        }
+        SampleCopy.of("valley", place, name -> !name.equals("aquifer.json"));
         Map<String, FileRecord> before = contents(place);
         Plan plan = LooseValley.corrected(Proposal.of(IntakeJob.look(List.of(place), Progress.NONE)));
         plan = plan.with(plan.wishes().with(Wishes.Topic.TIMES, "monthly").with(Wishes.Topic.START, "2021-10-01"));
@@ -233,13 +227,7 @@ class IntakeJobTest {
     void theTerracesTablesTellEvenItsUnevenTurnedGrid() throws IOException {
         Path terrace = Path.of("sample-aquifers/terrace");
         Path place = folder.resolve("tables");
-        Files.createDirectories(place);
-        try (Stream<Path> files = Files.list(terrace)) {
-            for (Path file :
-                    files.filter(file -> file.toString().endsWith(".csv")).toList()) {
-                Files.copy(file, place.resolve(file.getFileName()));
-            }
-        }
+        SampleCopy.of("terrace", place, name -> name.endsWith(".csv"));
         Plan plan = Proposal.of(IntakeJob.look(List.of(place), Progress.NONE));
         for (int i = 0; i < plan.items().size(); i++) {
             Item item = plan.items().get(i);
@@ -260,10 +248,10 @@ class IntakeJobTest {
     void theDepotsTablesGiveItsWaterBudgetOnceGridTimesAndStorageAreTyped() throws IOException {
         Path depot = Path.of("sample-aquifers/depot");
         Path place = folder.resolve("tables");
-        Files.createDirectories(place);
-        for (String name : List.of("flow.csv", "head.csv", "ground.csv", "concentration.csv", "spill.csv")) {
-            Files.copy(depot.resolve(name), place.resolve(name));
-        }
+        SampleCopy.of(
+                "depot",
+                place,
+                List.of("flow.csv", "head.csv", "ground.csv", "concentration.csv", "spill.csv")::contains);
         Plan plan = Proposal.of(IntakeJob.look(List.of(place), Progress.NONE));
         plan = LooseFolder.said(plan, Wishes.Topic.X, "0 10 25");
         plan = LooseFolder.said(plan, Wishes.Topic.Y, "0, 10, 15");

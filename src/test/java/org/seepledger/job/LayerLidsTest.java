@@ -20,7 +20,8 @@ class LayerLidsTest {
     void lidsOnLayersGiveTheBudgetOfTheLayers() {
         try (Workbench valley = Workbench.open(Path.of("sample-aquifers/valley"))) {
             List<Layer> layers = valley.aquifer().layers();
-            List<Prism> drawn = valley.read(Path.of("sample-aquifers/valley/prisms.geojson"))
+            List<Prism> drawn = valley.drawings()
+                    .prisms(Path.of("sample-aquifers/valley/prisms.geojson"))
                     .prisms();
             for (Prism prism : drawn) {
                 for (int first = 0; first < 3; first++) {

@@ -84,7 +84,7 @@ class SoluteBenchTest {
         try (Workbench bench = Workbench.open(set)) {
             List<String> expected = Rows.text(out.resolve("plume.csv"));
             SoluteBench.Choice choice = new SoluteBench.Choice(dispersion, OptionalDouble.empty());
-            List<Prism> drawn = bench.read(prisms).prisms();
+            List<Prism> drawn = bench.drawings().prisms(prisms).prisms();
             RecordPlume record = bench.solutes().record(drawn, choice, Progress.NONE);
             assertThat(rows(bench, record.plumes(), periods(bench))).isEqualTo(expected);
             assertThat(intervals(bench, drawn, choice)).containsExactlyInAnyOrderElementsOf(expected);
@@ -120,7 +120,7 @@ class SoluteBenchTest {
 
     /** Interval by interval, then put together again. */
     private List<String> crossed(Workbench bench, Path file) throws IOException {
-        List<Transect> transects = bench.solutes().transects(file);
+        List<Transect> transects = bench.drawings().transects(file);
         List<Crossing> all = bench.solutes().crossings(transects, OptionalInt.empty(), Progress.NONE);
         for (Period period : periods(bench)) {
             int interval = period.parts().get(0).interval();
@@ -150,7 +150,10 @@ class SoluteBenchTest {
     @Test
     void whatWasNotAskedForHasNoNumbers() {
         try (Workbench bench = Workbench.open(DEPOT)) {
-            Prism yard = bench.read(DEPOT.resolve("prisms.geojson")).prisms().get(0);
+            Prism yard = bench.drawings()
+                    .prisms(DEPOT.resolve("prisms.geojson"))
+                    .prisms()
+                    .get(0);
             SoluteBench.Choice choice = new SoluteBench.Choice(false, OptionalDouble.empty());
             IntervalPlume known = bench.solutes().interval(yard, 3, choice, Progress.NONE);
             assertThat(known.plumes()).hasSize(2);
@@ -179,13 +182,13 @@ class SoluteBenchTest {
         try (Workbench bench = Workbench.open(DEPOT)) {
             Path file = folder.resolve("lines.geojson");
             List<double[]> places = List.of(new double[] {1 / 3.0, 2.2}, new double[] {100.1, 17 / 7.0});
-            bench.solutes().write(file, List.of(new Transect("a \"b\"", places)));
-            List<Transect> read = bench.solutes().transects(file);
+            bench.drawings().write(file, List.of(new Transect("a \"b\"", places)));
+            List<Transect> read = bench.drawings().transects(file);
             assertThat(read).hasSize(1);
             assertThat(read.get(0).name()).isEqualTo("a \"b\"");
             assertThat(read.get(0).vertices()).usingRecursiveComparison().isEqualTo(places);
-            bench.solutes().write(file, List.of());
-            assertThat(bench.solutes().transects(file)).isEmpty();
+            bench.drawings().write(file, List.of());
+            assertThat(bench.drawings().transects(file)).isEmpty();
         }
     }
 

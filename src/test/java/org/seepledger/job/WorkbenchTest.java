@@ -70,7 +70,7 @@ class WorkbenchTest {
         Path out = folder.resolve("out");
         BalanceJob.run(Requests.byInterval(set, prisms, out), Progress.NONE);
         try (Workbench bench = Workbench.open(set)) {
-            List<Prism> drawn = bench.read(prisms).prisms();
+            List<Prism> drawn = bench.drawings().prisms(prisms).prisms();
             List<Period> periods = bench.periods(Periods.Every.INTERVAL, 1);
             List<PrismBudget> byInterval = new ArrayList<>();
             for (Prism prism : drawn) {
@@ -197,7 +197,7 @@ class WorkbenchTest {
     private static void waitUntilClosing(Workbench bench) {
         try {
             while (true) {
-                bench.quantities();
+                bench.views().quantities();
             }
         } catch (Cancelled e) {
             // It has begun to close, and waits for those who still ask.
@@ -226,7 +226,9 @@ class WorkbenchTest {
     void saysWhatItCutOff() throws IOException {
         SmallSets.flux(folder.resolve("set"));
         try (Workbench bench = Workbench.open(folder.resolve("set"))) {
-            List<Prism> drawn = bench.read(folder.resolve("set/prisms.geojson")).prisms();
+            List<Prism> drawn = bench.drawings()
+                    .prisms(folder.resolve("set/prisms.geojson"))
+                    .prisms();
             Prism wide = Prisms.of("wide", 0, 1, Shapes.box(900, 2050, 1100, 2200));
             assertThat(bench.budgets(List.of(wide), 0, Progress.NONE).get(0).notes())
                     .singleElement()

@@ -46,12 +46,6 @@ class OutlineTest {
     }
 
     @Test
-    void movesASideWithBothItsEnds() {
-        assertThat(BOX.moveSide(3, -2, 1).places()).isEqualTo(places(-2, 1, 10, 0, 10, 10, -2, 11));
-        assertThat(BOX.moveSide(0, 10, 0).places()).isEqualTo(places(10, 0, 20, 0, 10, 10, 0, 10));
-    }
-
-    @Test
     void aVertexMovedOntoItsNeighbourBecomesOneWithIt() {
         Outline bank = BOX.under(List.of(1), Optional.of("bank"));
         assertThat(bank.move(1, new Place(10, 10)).places()).isEqualTo(places(0, 0, 10, 10, 0, 10));

@@ -82,7 +82,7 @@ final class CardModel {
                 .flatMap(Optional::stream)
                 .filter(Limit.Surface.class::isInstance)
                 .map(Limit.Surface.class::cast)
-                .filter(surface -> !model.knows(surface))
+                .filter(surface -> !model.solids().knows(surface))
                 .findFirst();
         if (unread.isPresent()) {
             surfaces.read(unread.get(), () -> lids(top, bottom));

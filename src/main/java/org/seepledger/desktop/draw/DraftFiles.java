@@ -94,7 +94,7 @@ public final class DraftFiles {
                     Path aside = set.path().resolve(Opening.UNSAVED);
                     Path linesAside = set.path().resolve(Opening.UNSAVED_TRANSECTS);
                     if (unsaved) {
-                        set.workbench().write(aside, drawing);
+                        set.workbench().drawings().write(aside, drawing);
                         writeLines(set, linesAside, drawing);
                     } else {
                         Files.deleteIfExists(aside);
@@ -128,7 +128,7 @@ public final class DraftFiles {
         files.run(
                 progress -> {
                     EntryGuard.enter();
-                    set.workbench().write(file, drawing);
+                    set.workbench().drawings().write(file, drawing);
                     if (own) {
                         writeLines(set, set.path().resolve(Opening.TRANSECTS), drawing);
                         Files.deleteIfExists(set.path().resolve(Opening.UNSAVED));
@@ -155,7 +155,7 @@ public final class DraftFiles {
                 && (!drawing.lines().isEmpty()
                         || Files.exists(file)
                         || Files.exists(set.path().resolve(Opening.TRANSECTS)))) {
-            set.workbench().solutes().write(file, transects(drawing));
+            set.workbench().drawings().write(file, transects(drawing));
         }
     }
 
@@ -172,7 +172,7 @@ public final class DraftFiles {
                     files.run(
                             progress -> {
                                 EntryGuard.enter();
-                                set.workbench().solutes().write(file, transects(drawing));
+                                set.workbench().drawings().write(file, transects(drawing));
                                 return file;
                             },
                             written -> model.session()
@@ -189,7 +189,7 @@ public final class DraftFiles {
                 .ifPresent(file -> files.run(
                         progress -> {
                             EntryGuard.enter();
-                            return set.workbench().solutes().transects(file);
+                            return set.workbench().drawings().transects(file);
                         },
                         this::add,
                         fault -> model.session().notices().refuse(FaultWords.of(fault)))));
@@ -214,14 +214,14 @@ public final class DraftFiles {
                 .ifPresent(file -> files.run(
                         progress -> {
                             EntryGuard.enter();
-                            return set.workbench().drawing(file);
+                            return set.workbench().drawings().drawing(file);
                         },
                         this::add,
                         fault -> model.session().notices().refuse(FaultWords.of(fault)))));
     }
 
     private void add(DrawingFile file) {
-        model.know(file.surfaces());
+        model.solids().know(file.surfaces());
         List<Shape> shapes = file.drawing().shapes();
         boolean added = model.step("step.import", before -> {
             Drawing drawing = before;

@@ -1,6 +1,5 @@
 package org.seepledger.desktop.draw;
 
-import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -34,8 +33,8 @@ public final class DraftModel implements Drafting {
     private final ObjectProperty<Tool> tool = new SimpleObjectProperty<>(Tool.SELECT);
     private final ReadOnlyLongWrapper version = new ReadOnlyLongWrapper();
     private final ReadOnlyStringWrapper refusal = new ReadOnlyStringWrapper("");
+    private final Solids solids = new Solids();
     private History history = new History(Drawing.EMPTY);
-    private Map<Limit.Surface, GriddedValues> surfaces = Map.of();
     private Drawing saved = Drawing.EMPTY;
 
     /**
@@ -65,7 +64,7 @@ public final class DraftModel implements Drafting {
      * @param known the surfaces that shapes name
      */
     public void begin(Drawing kept, Drawing current, Map<Limit.Surface, GriddedValues> known) {
-        surfaces = Map.copyOf(known);
+        solids.begin(known);
         saved = kept;
         history = new History(kept);
         tool.set(Tool.SELECT);
@@ -78,15 +77,9 @@ public final class DraftModel implements Drafting {
         publish(true);
     }
 
-    /** Learns of more surfaces that shapes name. */
-    void know(Map<Limit.Surface, GriddedValues> more) {
-        Map<Limit.Surface, GriddedValues> all = new HashMap<>(surfaces);
-        all.putAll(more);
-        surfaces = Map.copyOf(all);
-    }
-
-    boolean knows(Limit.Surface surface) {
-        return surfaces.containsKey(surface);
+    /** {@return what makes prisms of what is drawn} */
+    Solids solids() {
+        return solids;
     }
 
     private void publish(boolean settled) {
@@ -94,12 +87,7 @@ public final class DraftModel implements Drafting {
                 session.set().get().map(set -> set.aquifer().layers()).orElse(List.of());
         session.drawing()
                 .set(new org.seepledger.desktop.session.Drawing(
-                        session.drawing().get().revision() + 1,
-                        history.current().shapes().stream()
-                                .map(shape -> shape.prism(
-                                        Math.max(1, layers.size()), (limit, lid) -> surface(layers, limit, lid)))
-                                .toList(),
-                        settled));
+                        session.drawing().get().revision() + 1, solids.of(history.current(), layers), settled));
         publishLines(settled);
         tellShapes();
         if (history.current().find(session.selected().get()).isEmpty()) {
@@ -131,10 +119,6 @@ public final class DraftModel implements Drafting {
     /** {@return the transect that is chosen, if there is one} */
     Optional<ControlLine> selectedLine() {
         return drawing().line(session.transect().get());
-    }
-
-    private GriddedValues surface(List<Layer> layers, Limit limit, String lid) {
-        return limit instanceof Limit.Layer layer ? layer.among(layers, lid) : surfaces.get(limit);
     }
 
     private void tellShapes() {

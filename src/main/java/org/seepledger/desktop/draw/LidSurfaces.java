@@ -66,10 +66,10 @@ public final class LidSurfaces {
                 .ifPresent(set -> reading.run(
                         progress -> {
                             EntryGuard.enter();
-                            return set.workbench().surface(set.path().resolve(Opening.PRISMS), surface);
+                            return set.workbench().drawings().surface(set.path().resolve(Opening.PRISMS), surface);
                         },
                         values -> {
-                            model.know(Map.of(surface, values));
+                            model.solids().know(Map.of(surface, values));
                             then.run();
                         },
                         fault -> model.session().notices().refuse(FaultWords.of(fault))));

@@ -4,10 +4,10 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import javafx.scene.control.ChoiceBox;
-import javafx.util.StringConverter;
 import org.seepledger.aquifer.Solute;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
+import org.seepledger.desktop.words.ChoiceWords;
 import org.seepledger.desktop.words.Words;
 
 /** Whose budget all pages show: the water's, or a solute's. Not there where the set has no solutes. */
@@ -22,19 +22,8 @@ final class SubjectBox extends ChoiceBox<String> {
         setId("subject");
         setPrefWidth(WIDTH);
         setMinWidth(USE_PREF_SIZE);
-        setConverter(new StringConverter<>() {
-            @Override
-            public String toString(String solute) {
-                return solute == null || solute.isEmpty()
-                        ? Words.of("subject.water")
-                        : Words.of("subject.solute", solute);
-            }
-
-            @Override
-            public String fromString(String text) {
-                throw new UnsupportedOperationException();
-            }
-        });
+        setConverter(new ChoiceWords<>(
+                solute -> solute.isEmpty() ? Words.of("subject.water") : Words.of("subject.solute", solute)));
         valueProperty().addListener((value, before, after) -> {
             if (after != null) {
                 session.solute().set(after);

@@ -69,7 +69,7 @@ final class ChoicesView extends VBox {
                 ChoicesView::month,
                 budget.waterYearStart().asObject());
         month.disableProperty().bind(fromFile.or(Bindings.notEqual(Periods.Every.WATER_YEAR, budget.every())));
-        fields.path("periods", budget.periods(), budget.periods().problem(), model::choosePeriods);
+        fields.path("periods", budget.periods(), budget.periods().problem(), model.questions()::periods);
         fields.text("rate", budget.rateUnit());
         fields.text("volume", budget.volumeUnit());
         fields.text("limit", budget.limit());
@@ -99,8 +99,8 @@ final class ChoicesView extends VBox {
         fields.text("mass", solutes.massUnit());
         TextField above = fields.text("above", solutes.above());
         above.setPrefColumnCount(12);
-        fields.path("transects", solutes.transects(), solutes.transects().problem(), model::chooseTransects);
-        fields.path("panels", solutes.panels(), solutes.panels().problem(), model::choosePanels);
+        fields.path("transects", solutes.transects(), solutes.transects().problem(), model.questions()::transects);
+        fields.path("panels", solutes.panels(), solutes.panels().problem(), model.questions()::panels);
         fields.check("dispersion", solutes.dispersion());
         return fields;
     }

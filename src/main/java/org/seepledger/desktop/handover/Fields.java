@@ -17,13 +17,14 @@ import javafx.scene.layout.GridPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.VBox;
-import javafx.util.StringConverter;
+import org.seepledger.desktop.words.ChoiceWords;
 import org.seepledger.desktop.words.Words;
 
 /** A form: a name on the left of each field, what is wrong with it below. */
 final class Fields extends GridPane {
 
     private static final double LABELS = 124;
+    private static final double LEAST_WIDTH = 150;
     private static final String KEY = "handover.";
 
     private int row;
@@ -67,17 +68,7 @@ final class Fields extends GridPane {
     <T> ChoiceBox<T> choice(String key, List<T> choices, Function<T, String> words, Property<T> chosen) {
         ChoiceBox<T> box = new ChoiceBox<>();
         box.setId(id(key));
-        box.setConverter(new StringConverter<>() {
-            @Override
-            public String toString(T choice) {
-                return choice == null ? "" : words.apply(choice);
-            }
-
-            @Override
-            public T fromString(String text) {
-                throw new UnsupportedOperationException();
-            }
-        });
+        box.setConverter(new ChoiceWords<>(words));
         box.getItems().setAll(choices);
         box.setValue(chosen.getValue());
         box.valueProperty().addListener((value, before, after) -> {
@@ -118,6 +109,7 @@ final class Fields extends GridPane {
     void path(String key, Entry<?> entry, ObservableValue<String> problem, Runnable asks) {
         TextField field = new TextField();
         entered(key, field, entry);
+        field.setMinWidth(LEAST_WIDTH);
         Button ask = new Button(Words.of("handover.ask"));
         ask.setId(id(key) + "-ask");
         ask.setMinWidth(USE_PREF_SIZE);

@@ -21,6 +21,7 @@ import javafx.scene.layout.StackPane;
 import javafx.scene.layout.VBox;
 import javafx.util.Duration;
 import org.seepledger.desktop.handover.HandoverModel.Stage;
+import org.seepledger.desktop.pane.WordsLine;
 import org.seepledger.desktop.words.Words;
 
 /** The page on which a budget is handed over. */
@@ -91,7 +92,7 @@ public final class HandoverPage extends BorderPane {
 
     private Node right() {
         Fields where = new Fields().heading("where");
-        where.path("out", model.choices().out(), model.outProblem(), model::chooseFolder);
+        where.path("out", model.choices().out(), model.prospect().outProblem(), model.questions()::folder);
         where.check("overwrite", model.choices().overwrite());
         where.disableProperty().bind(is(Stage.WORKING));
         StackPane below =
@@ -119,7 +120,7 @@ public final class HandoverPage extends BorderPane {
         text.setId("handover-commands");
         text.setEditable(false);
         text.getStyleClass().add("sl-code");
-        text.textProperty().bind(model.commands());
+        text.textProperty().bind(model.prospect().commands());
         VBox.setVgrow(text, Priority.ALWAYS);
         Label note = new Label(Words.of("handover.commands.note"));
         note.getStyleClass().add("sl-small");
@@ -134,22 +135,10 @@ public final class HandoverPage extends BorderPane {
         VBox box = new VBox(4);
         box.getChildren()
                 .addAll(
-                        line("handover-prisms", model.prismsNote(), "sl-small"),
-                        line("handover-problem", model.problem(), "sl-warning"),
-                        line("handover-fault", model.fault(), "sl-fault"));
+                        new WordsLine("handover-prisms", model.prospect().prismsNote(), "sl-small"),
+                        new WordsLine("handover-problem", model.prospect().problem(), "sl-warning"),
+                        new WordsLine("handover-fault", model.fault(), "sl-fault"));
         return box;
-    }
-
-    private static Label line(String id, javafx.beans.value.ObservableValue<String> words, String style) {
-        Label line = new Label();
-        line.setId(id);
-        line.setWrapText(true);
-        line.setMinHeight(USE_PREF_SIZE);
-        line.getStyleClass().add(style);
-        line.textProperty().bind(words);
-        line.visibleProperty().bind(line.textProperty().isNotEmpty());
-        line.managedProperty().bind(line.visibleProperty());
-        return line;
     }
 
     private Node buttons() {
@@ -158,7 +147,7 @@ public final class HandoverPage extends BorderPane {
         go.getStyleClass().add("accent");
         go.setDefaultButton(true);
         go.setOnAction(pressed -> model.handOver());
-        go.disableProperty().bind(model.problem().isNotEmpty());
+        go.disableProperty().bind(model.prospect().problem().isNotEmpty());
         Button away = new Button(Words.of("close"));
         away.setOnAction(pressed -> close.run());
         Region gap = new Region();

@@ -11,7 +11,7 @@ import javafx.scene.layout.ColumnConstraints;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.Priority;
 import javafx.scene.text.TextAlignment;
-import javafx.util.StringConverter;
+import org.seepledger.desktop.words.ChoiceWords;
 import org.seepledger.desktop.words.Words;
 
 /** Lines of a word and what is chosen or typed for it. */
@@ -54,17 +54,7 @@ final class Form extends GridPane {
         ComboBox<T> box = new ComboBox<>();
         box.setId(id);
         box.getItems().setAll(values);
-        box.setConverter(new StringConverter<>() {
-            @Override
-            public String toString(T value) {
-                return value == null ? "" : words.apply(value);
-            }
-
-            @Override
-            public T fromString(String text) {
-                throw new UnsupportedOperationException();
-            }
-        });
+        box.setConverter(new ChoiceWords<>(words));
         box.setValue(chosen);
         box.setOnAction(picked -> {
             if (box.getValue() != null) {

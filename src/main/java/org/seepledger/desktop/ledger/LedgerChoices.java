@@ -15,9 +15,9 @@ import javafx.scene.control.Label;
 import javafx.scene.control.Tooltip;
 import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.VBox;
-import javafx.util.StringConverter;
 import org.seepledger.balance.Periods.Every;
 import org.seepledger.desktop.budget.Reading;
+import org.seepledger.desktop.words.ChoiceWords;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.report.Wording;
 import org.seepledger.unit.Measure;
@@ -53,7 +53,7 @@ final class LedgerChoices extends VBox {
         getChildren().addAll(belongs, closure, notes, choices);
         units.setId("ledger-unit");
         units.setMinWidth(96);
-        units.setConverter(converter(LedgerChoices::unit));
+        units.setConverter(new ChoiceWords<>(LedgerChoices::unit));
         units.setOnAction(chosen -> take());
         reading.changes().addListener((changes, before, after) -> fill());
         model.solute().addListener((solute, before, after) -> fill());
@@ -143,7 +143,7 @@ final class LedgerChoices extends VBox {
             String id, List<T> choices, Function<T, String> words, Property<? super T> chosen) {
         ChoiceBox<T> box = new ChoiceBox<>();
         box.setId(id);
-        box.setConverter(converter(words));
+        box.setConverter(new ChoiceWords<>(words));
         box.getItems().setAll(choices);
         @SuppressWarnings("unchecked")
         Property<T> property = (Property<T>) chosen;
@@ -155,20 +155,6 @@ final class LedgerChoices extends VBox {
         property.addListener((value, before, after) -> box.setValue(after));
         box.setValue(property.getValue());
         return box;
-    }
-
-    private static <T> StringConverter<T> converter(Function<T, String> words) {
-        return new StringConverter<>() {
-            @Override
-            public String toString(T choice) {
-                return choice == null ? "" : words.apply(choice);
-            }
-
-            @Override
-            public T fromString(String text) {
-                throw new UnsupportedOperationException();
-            }
-        };
     }
 
     private void fill() {

@@ -151,10 +151,6 @@ public final class LedgerModel {
 
     /** Asks where the number of the chosen row comes from. */
     public void askOrigin() {
-        if (sheets.ofSolute()) {
-            session.notices().refuse(Words.of("ledger.origin.water"));
-            return;
-        }
         chosen.get()
                 .filter(row -> row.kind() != LedgerRow.Kind.HEADING && row.kind() != LedgerRow.Kind.HELD)
                 .ifPresentOrElse(this::askOrigin, () -> session.notices().refuse(Words.of("ledger.origin.none")));

@@ -116,7 +116,7 @@ final class FluxModel {
     }
 
     private static FluxField field(Request request, Window window, int stride, Progress progress) {
-        return request.set().workbench().flux(request.layer(), request.interval(), window, stride, progress);
+        return request.set().workbench().views().flux(request.layer(), request.interval(), window, stride, progress);
     }
 
     /** The power of two that keeps arrows apart. */

@@ -56,7 +56,7 @@ public final class GroundModel {
         reading.run(
                 progress -> {
                     EntryGuard.enter();
-                    return set.workbench().ground(file, progress);
+                    return set.workbench().views().ground(file, progress);
                 },
                 read -> {
                     picture.set(Optional.of(read));

@@ -74,7 +74,7 @@ final class Lettering {
         }
     }
 
-    /** A prism is named above its northernmost vertex, else in its middle. */
+    /** A prism is named above its northernmost vertex, else near its middle or below it. */
     private void name(Prism prism, boolean selected) {
         Side top = prism.rings().get(0).sides().get(0);
         for (Side side : prism.rings().get(0).sides()) {
@@ -82,16 +82,18 @@ final class Lettering {
         }
         double x = camera.x(top.x());
         double y = camera.y(top.y());
-        Extent extent = Extent.of(prism);
-        double middleX = camera.x(extent.middleX());
-        double middleY = camera.y(extent.middleY());
-        List<Mark.Text> choices = List.of(
+        List<Mark.Text> choices = new ArrayList<>(List.of(
                 text(x, y - 10, prism.name(), Mark.Anchor.MIDDLE, selected),
                 text(x + 9, y - 4, prism.name(), Mark.Anchor.START, selected),
                 text(x - 9, y - 4, prism.name(), Mark.Anchor.END, selected),
-                text(x, y + 20, prism.name(), Mark.Anchor.MIDDLE, selected),
-                text(middleX, middleY, prism.name(), Mark.Anchor.MIDDLE, selected),
-                text(middleX, middleY + 34, prism.name(), Mark.Anchor.MIDDLE, selected));
+                text(x, y + 20, prism.name(), Mark.Anchor.MIDDLE, selected)));
+        Extent extent = Extent.of(prism);
+        double middleX = camera.x(extent.middleX());
+        double middleY = camera.y(extent.middleY());
+        for (double down : new double[] {0, 34, -34, 52, -52}) {
+            choices.add(text(middleX, middleY + down, prism.name(), Mark.Anchor.MIDDLE, selected));
+        }
+        choices.add(text(middleX, camera.y(extent.south()) + 22, prism.name(), Mark.Anchor.MIDDLE, selected));
         labels.place(choices, marks);
     }
 

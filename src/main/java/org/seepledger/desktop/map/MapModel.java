@@ -88,7 +88,7 @@ public final class MapModel {
                         set -> lookingForWells.run(
                                 progress -> {
                                     EntryGuard.enter();
-                                    return set.workbench().wells(interval);
+                                    return set.workbench().views().wells(interval);
                                 },
                                 session.wells()::set,
                                 fault -> session.notices().refuse(FaultWords.of(fault))),

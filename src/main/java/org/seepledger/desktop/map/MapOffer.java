@@ -46,7 +46,8 @@ final class MapOffer {
                     .put(
                             name,
                             new ShownPicture(
-                                    name, progress -> set.get().workbench().map(asked.get(), progress)));
+                                    name,
+                                    progress -> set.get().workbench().views().map(asked.get(), progress)));
         } else {
             session.pictures().remove(name);
         }

@@ -9,10 +9,10 @@ import javafx.scene.control.ComboBox;
 import javafx.scene.control.Label;
 import javafx.scene.control.MenuButton;
 import javafx.scene.layout.HBox;
-import javafx.util.StringConverter;
 import org.seepledger.aquifer.Times;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
+import org.seepledger.desktop.words.ChoiceWords;
 import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.job.MapQuantity;
@@ -40,17 +40,7 @@ public final class ShowingBar extends HBox {
         quantity.setId("quantity");
         quantity.setMinWidth(LEAST_WIDTH);
         quantity.setItems(model.values().quantities());
-        quantity.setConverter(new StringConverter<>() {
-            @Override
-            public String toString(MapQuantity each) {
-                return each == null ? "" : each.label();
-            }
-
-            @Override
-            public MapQuantity fromString(String text) {
-                throw new UnsupportedOperationException();
-            }
-        });
+        quantity.setConverter(new ChoiceWords<>(MapQuantity::label));
         quantity.setOnAction(chosen -> model.values().quantity().set(Optional.ofNullable(quantity.getValue())));
         model.values().quantity().addListener((shown, before, after) -> quantity.setValue(after.orElse(null)));
         quantity.setValue(model.values().quantity().get().orElse(null));

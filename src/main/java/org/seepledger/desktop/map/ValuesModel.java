@@ -65,7 +65,8 @@ public final class ValuesModel {
         scale.set(Optional.empty());
         lattice = set.map(opened -> Lattice.of(opened.aquifer().grid()));
         quantity.set(Optional.empty());
-        quantities.setAll(set.map(opened -> opened.workbench().quantities()).orElse(List.of()));
+        quantities.setAll(
+                set.map(opened -> opened.workbench().views().quantities()).orElse(List.of()));
         quantity.set(quantities.stream().findFirst());
     }
 
@@ -119,6 +120,7 @@ public final class ValuesModel {
     private static LayerView read(OpenSet set, Lattice lattice, LayerView.Request request, Progress progress) {
         EntryGuard.enter();
         GridLayer layer = set.workbench()
+                .views()
                 .layer(
                         request.quantity(),
                         request.layer(),

@@ -15,7 +15,6 @@ import javafx.beans.property.StringProperty;
 import javafx.collections.FXCollections;
 import javafx.collections.ObservableList;
 import org.seepledger.aquifer.Grid;
-import org.seepledger.desktop.budget.PeriodWords;
 import org.seepledger.desktop.budget.Reading;
 import org.seepledger.desktop.port.CopyBoard;
 import org.seepledger.desktop.port.FileDialogs;
@@ -35,8 +34,6 @@ import org.seepledger.job.TracedNumber.Line;
 import org.seepledger.prism.Prism;
 import org.seepledger.progress.Cancelled;
 import org.seepledger.report.CellPlace;
-import org.seepledger.report.Wording;
-import org.seepledger.unit.Figures;
 
 /** Where a number of the ledger comes from. */
 public final class OriginModel {
@@ -145,22 +142,13 @@ public final class OriginModel {
         question.ifPresent(last -> session.asked().set(Optional.of(last.row())));
     }
 
-    private String shown(double value) {
-        return session.numbers().get().of(Figures.typeset(value));
+    private TraceWords words() {
+        return new TraceWords(session.numbers().get(), reading.volumes().get());
     }
 
     private void trace(Question asked) {
         question = Optional.of(asked);
-        belongs.set(Words.of(
-                "origin.belongs",
-                asked.prism().name(),
-                asked.solute()
-                        .map(read -> Words.of("ledger.of.solute", read.name(), asked.itemWords()))
-                        .orElse(asked.itemWords()),
-                PeriodWords.of(
-                        asked.period(),
-                        asked.set().aquifer().times(),
-                        session.numbers().get())));
+        belongs.set(words().belongs(asked));
         command.set(asked.command().toString());
         state.set(PaneState.working(Words.of("origin.working")));
         tracing.run(
@@ -183,28 +171,10 @@ public final class OriginModel {
 
     private void answered(TracedNumber number) {
         answer = Optional.of(number);
-        String unit = Wording.raised(number.units().rate());
-        sum.set(Words.of("origin.sum", shown(number.net()), unit, number.count(), exact(number.sum()))
-                + amount(number));
+        sum.set(words().sum(number));
         fill();
         showRemark();
         state.set(PaneState.READY);
-    }
-
-    /** All digits, with a true minus. */
-    private static String exact(double number) {
-        return String.valueOf(number).replace('-', '\u2212');
-    }
-
-    /** What the ledger shows where it shows volumes or masses. */
-    private String amount(TracedNumber number) {
-        return reading.volumes().get()
-                ? " "
-                        + Words.of(
-                                "origin.amount",
-                                shown(number.amount()),
-                                Wording.raised(number.units().amount()))
-                : "";
     }
 
     private void fill() {
@@ -215,18 +185,7 @@ public final class OriginModel {
         String[] words = sought.get().strip().toLowerCase(Locale.ROOT).split("\\s*[,;]\\s*");
         lines.setAll(
                 number.largest().stream().filter(line -> holds(line, words)).toList());
-        double part = lines.stream().mapToDouble(Line::contribution).sum();
-        String unit = Wording.raised(number.units().rate());
-        String text = Words.of("origin.shown", lines.size(), shown(part), unit);
-        shown.set(
-                number.count() > number.largest().size()
-                        ? text + " "
-                                + Words.of(
-                                        "origin.rest",
-                                        number.count() - number.largest().size(),
-                                        shown(number.rest()),
-                                        unit)
-                        : text);
+        shown.set(words().shown(number, lines));
     }
 
     private static boolean holds(Line line, String[] words) {
@@ -305,7 +264,7 @@ public final class OriginModel {
         writing.run(
                 progress -> {
                     EntryGuard.enter();
-                    asked.set().workbench().mustHold(asked.prisms(), drawing);
+                    asked.set().workbench().drawings().mustHold(asked.prisms(), drawing);
                     asked.write(file, progress);
                     return file;
                 },

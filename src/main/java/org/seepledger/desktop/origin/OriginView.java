@@ -7,7 +7,6 @@ import java.util.List;
 import java.util.function.DoubleFunction;
 import java.util.function.Function;
 import javafx.beans.property.SimpleObjectProperty;
-import javafx.beans.value.ObservableValue;
 import javafx.collections.ListChangeListener;
 import javafx.collections.transformation.SortedList;
 import javafx.scene.Node;
@@ -23,6 +22,7 @@ import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.VBox;
 import org.seepledger.desktop.pane.StatePane;
+import org.seepledger.desktop.pane.WordsLine;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.job.TracedNumber.Line;
 import org.seepledger.unit.Figures;
@@ -63,11 +63,11 @@ public final class OriginView extends BorderPane {
         again.managedProperty().bind(model.changed());
         HBox tools = new HBox(8, export, copy, again);
         VBox head = new VBox(
-                line("origin-belongs", model.belongs(), "sl-strong"),
-                line("origin-sum", model.sum(), "sl-answer"),
-                line("origin-remark", model.remark(), "sl-warning"),
+                new WordsLine("origin-belongs", model.belongs(), "sl-strong"),
+                new WordsLine("origin-sum", model.sum(), "sl-answer"),
+                new WordsLine("origin-remark", model.remark(), "sl-warning"),
                 tools,
-                line("origin-shown", model.shown(), "sl-small"),
+                new WordsLine("origin-shown", model.shown(), "sl-small"),
                 sought);
         head.getStyleClass().add("sl-choices");
         return head;
@@ -79,18 +79,6 @@ public final class OriginView extends BorderPane {
         button.setMinWidth(USE_PREF_SIZE);
         button.setOnAction(pressed -> does.run());
         return button;
-    }
-
-    private static Label line(String id, ObservableValue<String> words, String style) {
-        Label line = new Label();
-        line.setId(id);
-        line.setWrapText(true);
-        line.setMinHeight(USE_PREF_SIZE);
-        line.getStyleClass().add(style);
-        line.textProperty().bind(words);
-        line.visibleProperty().bind(line.textProperty().isNotEmpty());
-        line.managedProperty().bind(line.visibleProperty());
-        return line;
     }
 
     private void buildTable() {

@@ -10,9 +10,9 @@ import javafx.scene.control.ChoiceBox;
 import javafx.scene.control.Label;
 import javafx.scene.layout.GridPane;
 import javafx.scene.layout.VBox;
-import javafx.util.StringConverter;
 import org.seepledger.desktop.budget.Reading;
 import org.seepledger.desktop.theme.Theme;
+import org.seepledger.desktop.words.ChoiceWords;
 import org.seepledger.desktop.words.NumberForm;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.report.Wording;
@@ -78,17 +78,7 @@ public final class PreferencesPage extends VBox {
         ChoiceBox<T> box = new ChoiceBox<>();
         box.setId("preference-" + name);
         box.setMaxWidth(Double.MAX_VALUE);
-        box.setConverter(new StringConverter<>() {
-            @Override
-            public String toString(T choice) {
-                return choice == null ? "" : words.apply(choice);
-            }
-
-            @Override
-            public T fromString(String text) {
-                throw new UnsupportedOperationException();
-            }
-        });
+        box.setConverter(new ChoiceWords<>(words));
         box.getItems().setAll(choices);
         box.valueProperty().bindBidirectional(property);
         Label label = new Label(Words.of("preferences." + name));

@@ -219,8 +219,9 @@ public final class WritingModel {
         lane.run(
                 progress -> {
                     EntryGuard.enter();
-                    set.ifPresent(open ->
-                            open.workbench().mustHold(request.get().prisms().orElseThrow(), drawing));
+                    set.ifPresent(open -> open.workbench()
+                            .drawings()
+                            .mustHold(request.get().prisms().orElseThrow(), drawing));
                     return ReviewJob.run(request.get(), progress);
                 },
                 outcome -> written(request.get().out(), outcome),

@@ -115,11 +115,13 @@ final class SectionFeed {
         Ground ground = question.ground;
         Profile profile = kept.filter(last -> last.ground.equals(ground))
                 .map(Kept::profile)
-                .orElseGet(
-                        () -> ground.set.workbench().profile(ground.line, ground.quantity, ground.interval, progress));
+                .orElseGet(() -> ground.set
+                        .workbench()
+                        .views()
+                        .profile(ground.line, ground.quantity, ground.interval, progress));
         kept = Optional.of(new Kept(ground, profile));
         double distance = question.within.orElse(SectionPicture.nearby(profile));
-        return ground.set.workbench().section(profile, question.prisms, distance, progress);
+        return ground.set.workbench().views().section(profile, question.prisms, distance, progress);
     }
 
     /** What has come is shown even where something newer is wanted by now: it is nearer to that than what was there. */

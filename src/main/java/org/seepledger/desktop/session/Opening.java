@@ -71,7 +71,7 @@ public record Opening(OpenSet set, DrawingFile kept, Optional<DrawingFile> unsav
     private static Optional<List<ControlLine>> lines(Path file, OpenSet set) {
         return set.solutes().isEmpty() || !Files.isRegularFile(file)
                 ? Optional.empty()
-                : Optional.of(set.workbench().solutes().transects(file).stream()
+                : Optional.of(set.workbench().drawings().transects(file).stream()
                         .map(ControlLine::of)
                         .toList());
     }
@@ -81,6 +81,8 @@ public record Opening(OpenSet set, DrawingFile kept, Optional<DrawingFile> unsav
     }
 
     private static Optional<DrawingFile> drawing(Path file, OpenSet set) {
-        return Files.isRegularFile(file) ? Optional.of(set.workbench().drawing(file)) : Optional.empty();
+        return Files.isRegularFile(file)
+                ? Optional.of(set.workbench().drawings().drawing(file))
+                : Optional.empty();
     }
 }

@@ -15,8 +15,8 @@ import javafx.scene.control.Tooltip;
 import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.VBox;
-import javafx.util.StringConverter;
 import org.seepledger.desktop.pane.FieldFault;
+import org.seepledger.desktop.words.ChoiceWords;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.job.PlumeRequest.Threshold;
 
@@ -116,19 +116,8 @@ public final class SolutePanel extends VBox {
         box.setId("solute-track");
         box.setPrefWidth(TRACK_WIDTH);
         box.getItems().setAll(SoluteLook.Track.values());
-        box.setConverter(new StringConverter<>() {
-            @Override
-            public String toString(SoluteLook.Track track) {
-                return track == null
-                        ? ""
-                        : Words.of("solute.track." + track.name().toLowerCase(java.util.Locale.ROOT));
-            }
-
-            @Override
-            public SoluteLook.Track fromString(String text) {
-                throw new UnsupportedOperationException();
-            }
-        });
+        box.setConverter(new ChoiceWords<>(
+                track -> Words.of("solute.track." + track.name().toLowerCase(java.util.Locale.ROOT))));
         box.valueProperty().bindBidirectional(look.track());
         box.setTooltip(new Tooltip(Words.of("solute.track.tip")));
         return row(label, box);

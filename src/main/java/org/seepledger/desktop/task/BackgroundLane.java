@@ -6,6 +6,7 @@ import java.util.Optional;
 import java.util.concurrent.ConcurrentHashMap;
 import java.util.concurrent.Executor;
 import java.util.concurrent.ScheduledThreadPoolExecutor;
+import java.util.concurrent.ThreadPoolExecutor;
 import java.util.concurrent.TimeUnit;
 import java.util.function.Consumer;
 import java.util.stream.Stream;
@@ -30,6 +31,8 @@ final class BackgroundLane implements Lane {
             return thread;
         });
         threads.setRemoveOnCancelPolicy(true);
+        // What is still asked for when the window has closed is not done.
+        threads.setRejectedExecutionHandler(new ThreadPoolExecutor.DiscardPolicy());
         threads.setExecuteExistingDelayedTasksAfterShutdownPolicy(false);
     }
 

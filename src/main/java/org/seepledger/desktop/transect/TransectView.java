@@ -17,8 +17,8 @@ import javafx.scene.control.Tooltip;
 import javafx.scene.layout.BorderPane;
 import javafx.scene.layout.FlowPane;
 import javafx.scene.layout.VBox;
-import javafx.util.StringConverter;
 import org.seepledger.desktop.pane.StatePane;
+import org.seepledger.desktop.words.ChoiceWords;
 import org.seepledger.desktop.words.Words;
 import org.seepledger.unit.Figures;
 
@@ -85,17 +85,7 @@ public final class TransectView extends BorderPane {
         choices.setId("transect-choice");
         choices.setMinWidth(150);
         choices.setItems(model.choices());
-        choices.setConverter(new StringConverter<>() {
-            @Override
-            public String toString(TransectModel.Choice choice) {
-                return choice == null ? "" : choice.name();
-            }
-
-            @Override
-            public TransectModel.Choice fromString(String text) {
-                throw new UnsupportedOperationException();
-            }
-        });
+        choices.setConverter(new ChoiceWords<>(TransectModel.Choice::name));
         choices.setOnAction(chosen -> Optional.ofNullable(choices.getValue())
                 .ifPresent(choice -> model.chosen().set(Optional.of(choice))));
         model.chosen().addListener((chosen, before, after) -> choices.setValue(after.orElse(null)));

@@ -5,10 +5,10 @@ import java.io.Writer;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
-import org.apache.commons.csv.CSVFormat;
 import org.apache.commons.csv.CSVPrinter;
 import org.seepledger.aquifer.Times;
 import org.seepledger.io.table.CsvText;
+import org.seepledger.io.table.NotedCsv;
 import org.seepledger.ledger.Period;
 
 /** A table of results being written: notes, a header, rows cell by cell, as RFC 4180 has it. */
@@ -17,20 +17,15 @@ final class ResultTable implements AutoCloseable {
     private final Writer text;
     private final CSVPrinter rows;
 
-    private ResultTable(Writer text) throws IOException {
+    private ResultTable(Writer text, CSVPrinter rows) {
         this.text = text;
-        this.rows = new CSVPrinter(text, CSVFormat.RFC4180);
+        this.rows = rows;
     }
 
     /** Begins a table with its notes, a line each, and header. */
     static ResultTable open(Path file, List<String> notes, String... header) throws IOException {
         Writer text = Files.newBufferedWriter(file);
-        for (String line : notes) {
-            text.write("# " + line + "\r\n");
-        }
-        ResultTable table = new ResultTable(text);
-        table.rows.printRecord((Object[]) header);
-        return table;
+        return new ResultTable(text, NotedCsv.begin(text, notes, header));
     }
 
     /** Writes one cell. */

@@ -5,9 +5,9 @@ import java.io.Writer;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
-import org.apache.commons.csv.CSVFormat;
 import org.apache.commons.csv.CSVPrinter;
 import org.seepledger.io.table.CsvText;
+import org.seepledger.io.table.NotedCsv;
 import org.seepledger.review.check.Beside;
 
 /** Writes {@code side_by_side.csv}: what was submitted beside what was recomputed. */
@@ -39,11 +39,7 @@ public final class BesideCsv {
      */
     public static void write(Path file, List<String> notes, List<Beside> rows) throws IOException {
         try (Writer text = Files.newBufferedWriter(file)) {
-            for (String line : notes) {
-                text.write("# " + line + "\r\n");
-            }
-            CSVPrinter printer = new CSVPrinter(text, CSVFormat.RFC4180);
-            printer.printRecord((Object[]) HEADER);
+            CSVPrinter printer = NotedCsv.begin(text, notes, HEADER);
             for (Beside row : rows) {
                 printer.printRecord(
                         CsvText.text(row.prism()),

@@ -9,9 +9,9 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.TreeSet;
-import org.apache.commons.csv.CSVFormat;
 import org.apache.commons.csv.CSVPrinter;
 import org.seepledger.io.table.CsvText;
+import org.seepledger.io.table.NotedCsv;
 import org.seepledger.review.change.Difference;
 import org.seepledger.review.change.RecordedRow;
 import org.seepledger.review.change.Split;
@@ -51,7 +51,7 @@ public final class DifferencesCsv {
      */
     public static void write(Path file, List<String> notes, List<Difference> differences) throws IOException {
         try (Writer text = Files.newBufferedWriter(file)) {
-            CSVPrinter rows = open(text, notes, HEADER);
+            CSVPrinter rows = NotedCsv.begin(text, notes, HEADER);
             for (Difference difference : differences) {
                 rows.printRecord(cells(difference, false));
                 if (!difference.any().isPercentage()) {
@@ -59,15 +59,6 @@ public final class DifferencesCsv {
                 }
             }
         }
-    }
-
-    private static CSVPrinter open(Writer text, List<String> notes, String[] header) throws IOException {
-        for (String line : notes) {
-            text.write("# " + line + "\r\n");
-        }
-        CSVPrinter rows = new CSVPrinter(text, CSVFormat.RFC4180);
-        rows.printRecord((Object[]) header);
-        return rows;
     }
 
     private static List<String> cells(Difference difference, boolean volumes) {
@@ -107,7 +98,7 @@ public final class DifferencesCsv {
         TreeSet<String> names = new TreeSet<>(first.keySet());
         names.addAll(second.keySet());
         try (Writer text = Files.newBufferedWriter(file)) {
-            CSVPrinter rows = open(text, notes, INPUTS);
+            CSVPrinter rows = NotedCsv.begin(text, notes, INPUTS);
             for (String name : names) {
                 rows.printRecord(
                         CsvText.text(name),

@@ -5,9 +5,9 @@ import java.io.Writer;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
-import org.apache.commons.csv.CSVFormat;
 import org.apache.commons.csv.CSVPrinter;
 import org.seepledger.io.table.CsvText;
+import org.seepledger.io.table.NotedCsv;
 import org.seepledger.review.check.Finding;
 
 /** Writes {@code findings.csv}. */
@@ -29,11 +29,7 @@ public final class FindingsCsv {
      */
     public static void write(Path file, List<String> notes, List<Finding> findings) throws IOException {
         try (Writer text = Files.newBufferedWriter(file)) {
-            for (String line : notes) {
-                text.write("# " + line + "\r\n");
-            }
-            CSVPrinter rows = new CSVPrinter(text, CSVFormat.RFC4180);
-            rows.printRecord((Object[]) HEADER);
+            CSVPrinter rows = NotedCsv.begin(text, notes, HEADER);
             for (Finding finding : findings) {
                 rows.printRecord(
                         finding.severity(),

@@ -23,13 +23,11 @@ import org.seepledger.review.change.RecordedRow;
  * What a run of {@code balance} left in its folder.
  *
  * @param folder the folder as the user named it
- * @param version the version of the program that wrote it
  * @param options its options
  * @param inputs its inputs with their fingerprints
  * @param rows its budget
  */
-public record RunFolder(
-        Path folder, String version, Map<String, String> options, List<FileRecord> inputs, List<RecordedRow> rows) {
+public record RunFolder(Path folder, Map<String, String> options, List<FileRecord> inputs, List<RecordedRow> rows) {
 
     private static final String BUDGET = "budget.csv";
 
@@ -70,7 +68,7 @@ public record RunFolder(
                         input.path("name").asText(),
                         input.path("bytes").asLong(),
                         input.path("sha256").asText())));
-        return new RunFolder(folder, root.path("version").asText(), options, inputs, rows(folder.resolve(BUDGET)));
+        return new RunFolder(folder, options, inputs, rows(folder.resolve(BUDGET)));
     }
 
     private static void checkUnchanged(Path folder, Path record) {

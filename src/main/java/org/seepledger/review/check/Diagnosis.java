@@ -64,13 +64,18 @@ final class Diagnosis {
     private void each() {
         Set<Series> left = new LinkedHashSet<>(bad(series));
         left.removeAll(thickness());
-        left.removeAll(exchanged(left));
-        left.removeAll(oneTurned(left));
+        left.removeAll(told(Turned.wholly(left, tolerance, slips)));
         left.removeIf(one -> slips.of(one).map(findings::add).isPresent());
+        left.removeAll(told(Turned.partly(left, tolerance, slips)));
         Coverage coverage = new Coverage(series, List.copyOf(left), tolerance, slips);
         findings.addAll(coverage.findings());
         left.removeAll(coverage.explained());
         rest(List.copyOf(left));
+    }
+
+    private Set<Series> told(Turned turned) {
+        findings.addAll(turned.findings());
+        return turned.explained();
     }
 
     /** The terms that differ; one whose in and out are both too small by the same was netted, and does not. */
@@ -247,52 +252,6 @@ final class Diagnosis {
                         .mapToDouble(Series::worstShare)
                         .max()
                         .orElse(0));
-    }
-
-    /** In and out of a term that have each other's numbers. */
-    private Set<Series> exchanged(Set<Series> left) {
-        Set<Series> found = new LinkedHashSet<>();
-        for (Series in : left) {
-            for (Series out : left) {
-                boolean pair = in.sense() == Sense.IN
-                        && out.sense() == Sense.OUT
-                        && in.selection().equals(out.selection())
-                        && in.points().size() == out.points().size();
-                if (pair && in.hasThatOf(out) && out.hasThatOf(in)) {
-                    Code code = in.storage() ? Code.STORAGE_TURNED : Code.SIGN;
-                    String words = in.storage()
-                            ? ": release and uptake are exchanged."
-                            : ": inflow and outflow are exchanged.";
-                    findings.add(slips.finding(Severity.FAULT, code, in, in.quoted() + words));
-                    found.add(in);
-                    found.add(out);
-                }
-            }
-        }
-        return found;
-    }
-
-    /** Terms of several items, one of which counts the wrong way. */
-    private Set<Series> oneTurned(Set<Series> left) {
-        Set<Series> found = new LinkedHashSet<>();
-        for (Series one : left) {
-            List<Series> same = left.stream()
-                    .filter(other -> other.selection().equals(one.selection()))
-                    .toList();
-            if (!found.contains(one) && !one.storage()) {
-                Optional<String> item = TurnedItem.of(same, tolerance);
-                item.ifPresent(name -> {
-                    findings.add(slips.finding(
-                            Severity.FAULT,
-                            Code.SIGN,
-                            one,
-                            one.quoted() + " would agree if \"" + name
-                                    + "\", which is part of it, counted the other way."));
-                    found.addAll(same);
-                });
-            }
-        }
-        return found;
     }
 
     /** What no slip explains. */

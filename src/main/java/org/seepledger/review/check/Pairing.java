@@ -1,6 +1,7 @@
 package org.seepledger.review.check;
 
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -23,6 +24,7 @@ final class Pairing {
     private final Reference reference;
     private final Rounding rounding;
     private final double tolerance;
+    private final Map<List<Object>, Selection> selections = new HashMap<>();
     private final Amount assumed;
 
     private Pairing(
@@ -70,8 +72,13 @@ final class Pairing {
         return series;
     }
 
-    /** Items that are tied by name are not in what a group stands for. */
     private Selection selection(Figure figure) {
+        return selections.computeIfAbsent(
+                List.of(figure.area(), figure.tie(), figure.layer()), any -> newSelection(figure));
+    }
+
+    /** Items that are tied by name are not in what a group stands for. */
+    private Selection newSelection(Figure figure) {
         Set<String> items = new TreeSet<>(items(figure));
         Set<String> named = new TreeSet<>();
         for (Figure other : figures) {

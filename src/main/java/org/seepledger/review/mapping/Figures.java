@@ -1,6 +1,5 @@
 package org.seepledger.review.mapping;
 
-import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
@@ -19,6 +18,7 @@ public final class Figures {
     private final Mapping mapping;
     private final Numerals numerals;
     private final PeriodWords periods;
+    private final RowPeriods rowPeriods;
     private final Catalogue catalogue;
     private final List<Column> columns;
     private final List<Figure> figures = new ArrayList<>();
@@ -36,6 +36,7 @@ public final class Figures {
         this.columns = mapping.columns();
         this.numerals = mapping.decimal().map(Numerals::with).orElseGet(() -> Numerals.of(sheet));
         this.periods = new PeriodWords(waterYearStart);
+        this.rowPeriods = new RowPeriods(sheet, mapping, numerals, periods);
     }
 
     /**
@@ -231,7 +232,7 @@ public final class Figures {
                 .map(known -> known.perPeriod() ? Amount.VOLUME : known.amount())
                 .or(() -> said);
         String where = meaning.area().isEmpty() ? area : meaning.area();
-        When when = when(row, meaning.period().isEmpty() ? period : meaning.period());
+        When when = rowPeriods.of(row, meaning.period().isEmpty() ? period : meaning.period());
         figures.add(new Figure(
                 where,
                 when,
@@ -268,38 +269,5 @@ public final class Figures {
                 ? text(row, Role.VOLUME_UNIT)
                 : text(row, Role.RATE_UNIT);
         return kept(kept(ofAmount, text(row, Role.UNIT)), kept(unit, mapping.unit()));
-    }
-
-    private When when(int row, String label) {
-        String tied = mapping.periods().getOrDefault(label, label);
-        Optional<Days> days = periods.of(tied);
-        double from = Double.NaN;
-        double to = Double.NaN;
-        Optional<LocalDate> first = Optional.empty();
-        Optional<LocalDate> last = Optional.empty();
-        for (int column = 0; column < columns.size(); column++) {
-            Role role = columns.get(column).role();
-            String cell = sheet.cell(row, column);
-            if (role == Role.FROM) {
-                first = PeriodWords.day(cell).isPresent() ? PeriodWords.day(cell) : first;
-                from = number(cell, from);
-            } else if (role == Role.TO) {
-                last = PeriodWords.day(cell).isPresent() ? PeriodWords.day(cell) : last;
-                to = number(cell, to);
-            }
-        }
-        if (first.isPresent() && last.isPresent()) {
-            days = Days.between(first.get(), last.get());
-        }
-        String named = label.isEmpty() && days.isPresent()
-                ? days.get().from() + " to " + days.get().to()
-                : label;
-        return new When(named, label.isEmpty() ? named : tied, days, from, to, MappingGuess.isWhole(label));
-    }
-
-    private double number(String cell, double before) {
-        return PeriodWords.day(cell).isPresent()
-                ? before
-                : numerals.read(cell).map(Numeral::value).orElse(before);
     }
 }

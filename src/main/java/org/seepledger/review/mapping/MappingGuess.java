@@ -26,6 +26,7 @@ public final class MappingGuess {
     private final Numerals numerals;
     private final PeriodWords periods;
     private final TermWords terms;
+    private final ColumnGuess guess;
 
     private MappingGuess(
             Sheet sheet, Catalogue catalogue, Numerals numerals, int waterYearStart, Optional<Mapping> corrections) {
@@ -35,6 +36,7 @@ public final class MappingGuess {
         this.numerals = numerals;
         this.periods = new PeriodWords(waterYearStart);
         this.terms = new TermWords(catalogue);
+        this.guess = new ColumnGuess(sheet, catalogue, periods, terms);
     }
 
     /**
@@ -57,7 +59,7 @@ public final class MappingGuess {
     private Mapping mapping(HeaderSearch.Header header) {
         List<Column> columns = new ArrayList<>();
         for (int column = 0; column < header.texts().size(); column++) {
-            columns.add(column(header, column));
+            columns.add(guess.of(header, column, numbers(column, header.row()) > 0));
         }
         settleLabels(columns, header.row());
         if (corrections.isPresent()) {
@@ -74,67 +76,6 @@ public final class MappingGuess {
         Mapping guessed = new Mapping(
                 read.header(), read.decimal(), read.unit(), columns, ties(read), read.areas(), read.periods());
         return corrections.map(guessed::under).orElse(guessed);
-    }
-
-    private Column column(HeaderSearch.Header header, int index) {
-        String text = header.texts().get(index);
-        String own = sheet.cell(header.row(), index);
-        String last = own.isEmpty() || UnitWords.isUnit(own) ? text : own;
-        Optional<Role> role =
-                ColumnWords.role(text).or(() -> last.equals(text) ? Optional.empty() : ColumnWords.role(last));
-        if (role.isPresent() && role.get() != Role.VALUE) {
-            return Column.of(text, role.get());
-        }
-        if (text.isEmpty() || numbers(index, header.row()) == 0) {
-            return Column.of(text, Role.IGNORED);
-        }
-        return values(text, last);
-    }
-
-    /** A column of figures, with all that its heading says of them. */
-    private Column values(String text, String last) {
-        String unit = UnitWords.in(text).orElse("");
-        String period = "";
-        String area = "";
-        String term = "";
-        String rest = text.equals(last)
-                ? ""
-                : text.substring(0, text.length() - last.length()).strip();
-        for (String part : List.of(rest, last)) {
-            String words = UnitWords.without(part);
-            if (words.isEmpty()
-                    || ColumnWords.role(part).filter(Role.VALUE::equals).isPresent()) {
-                continue;
-            }
-            String named = periodBehind(words);
-            period = named.isEmpty() ? period : named;
-            String before = words.substring(0, words.length() - named.length()).strip();
-            if (isPrism(before)) {
-                area = before;
-            } else if (!before.isEmpty() && (named.isEmpty() || tied(before))) {
-                term = before;
-            }
-        }
-        Optional<Sense> sense =
-                ColumnWords.role(last).filter(Role.VALUE::equals).flatMap(value -> ColumnWords.sense(last));
-        return new Column(text, Role.VALUE, term, period, area, sense, ColumnWords.amount(text), unit);
-    }
-
-    /** The period that a heading is or ends with; empty if none. */
-    private String periodBehind(String words) {
-        String rest = words;
-        while (!rest.isEmpty()) {
-            if (periods.isPeriod(rest) || rest.equals(words) && isWhole(rest)) {
-                return rest;
-            }
-            int blank = rest.indexOf(' ');
-            rest = blank < 0 ? "" : rest.substring(blank + 1);
-        }
-        return "";
-    }
-
-    private boolean isPrism(String words) {
-        return catalogue.prisms().stream().anyMatch(words::equalsIgnoreCase);
     }
 
     static boolean isWhole(String label) {
@@ -160,7 +101,7 @@ public final class MappingGuess {
             claim(columns, header, Role.TERM, cell -> true);
         }
         if (missing(columns, Role.AREA)) {
-            claim(columns, header, Role.AREA, this::isPrism);
+            claim(columns, header, Role.AREA, guess::isPrism);
         }
         boolean termsDown = !missing(columns, Role.TERM);
         for (int i = 0; i < columns.size(); i++) {

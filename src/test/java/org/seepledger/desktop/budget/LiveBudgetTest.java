@@ -33,7 +33,10 @@ class LiveBudgetTest {
     void open() {
         Opening opening = Opening.of(Path.of("sample-aquifers/valley"));
         set = opening.set();
-        prisms = set.workbench().read(set.path().resolve(Opening.PRISMS)).prisms();
+        prisms = set.workbench()
+                .drawings()
+                .prisms(set.path().resolve(Opening.PRISMS))
+                .prisms();
     }
 
     @AfterEach

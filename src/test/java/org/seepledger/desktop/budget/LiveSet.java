@@ -53,7 +53,10 @@ public final class LiveSet implements AutoCloseable {
     private LiveSet(Path folder) {
         Opening opening = Opening.of(folder);
         set = opening.set();
-        prisms = set.workbench().read(set.path().resolve(Opening.PRISMS)).prisms();
+        prisms = set.workbench()
+                .drawings()
+                .prisms(set.path().resolve(Opening.PRISMS))
+                .prisms();
         session.show(Optional.of(set));
         session.drawing().set(new Drawing(1, prisms, true));
         session.selected().set(prisms.get(0).name());

@@ -13,6 +13,7 @@ import org.seepledger.desktop.budget.LiveSet;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.task.DirectTasks;
 import org.seepledger.report.Answer;
+import org.seepledger.sample.SampleCopy;
 
 class ClosureModelTest {
 
@@ -63,11 +64,7 @@ class ClosureModelTest {
 
     @Test
     void thePeriodShownHasCellsOfItsOwn(@TempDir Path folder) throws IOException {
-        try (var sample = Files.list(Path.of("sample-aquifers/valley"))) {
-            for (Path file : sample.toList()) {
-                Files.copy(file, folder.resolve(file.getFileName()));
-            }
-        }
+        SampleCopy.of("valley", folder);
         Path described = folder.resolve("aquifer.json");
         Files.writeString(described, Files.readString(described).replace("\"specific_yield.tif\"", "0.02"));
         try (LiveSet wrong = LiveSet.of(folder)) {

@@ -14,6 +14,7 @@ import org.seepledger.desktop.port.GivenAnswers;
 import org.seepledger.desktop.session.Opening;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.task.DirectTasks;
+import org.seepledger.sample.SampleCopy;
 import org.seepledger.sketch.Drawing;
 import org.seepledger.sketch.Limit;
 import org.seepledger.sketch.Reach;
@@ -34,11 +35,7 @@ class CardTest {
 
     @BeforeEach
     void open() throws IOException {
-        try (var sample = Files.list(Path.of("sample-aquifers/valley"))) {
-            for (Path file : sample.toList()) {
-                Files.copy(file, folder.resolve(file.getFileName()));
-            }
-        }
+        SampleCopy.of("valley", folder);
         opening = Opening.of(folder);
         session.show(Optional.of(opening.set()));
         files.begin(opening);

@@ -4,7 +4,6 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import java.io.IOException;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
@@ -21,6 +20,7 @@ import org.seepledger.desktop.session.Opening;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.task.DirectTasks;
 import org.seepledger.prism.VerticalRange;
+import org.seepledger.sample.SampleCopy;
 import org.seepledger.sketch.Drawing;
 import org.seepledger.sketch.Place;
 import org.seepledger.sketch.RingAt;
@@ -40,11 +40,7 @@ class DraftTest {
 
     @BeforeEach
     void open() throws IOException {
-        try (var sample = Files.list(Path.of("sample-aquifers/valley"))) {
-            for (Path file : sample.toList()) {
-                Files.copy(file, folder.resolve(file.getFileName()));
-            }
-        }
+        SampleCopy.of("valley", folder);
         reopen();
     }
 
@@ -52,7 +48,7 @@ class DraftTest {
         Opening opening = Opening.of(folder);
         opened.add(opening);
         session.show(Optional.of(opening.set()));
-        session.wells().set(opening.set().workbench().wells(0));
+        session.wells().set(opening.set().workbench().views().wells(0));
         files.begin(opening);
     }
 
@@ -230,7 +226,8 @@ class DraftTest {
 
     @Test
     void aCircleStandsOnTheWellThatIsClicked() {
-        var well = session.set().get().orElseThrow().workbench().wells(0).get(0);
+        var well =
+                session.set().get().orElseThrow().workbench().views().wells(0).get(0);
         model.choose(Tool.CIRCLE);
         click(well.x() + 7, well.y() - 5);
         hand.type("120");

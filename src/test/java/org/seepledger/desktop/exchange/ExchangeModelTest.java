@@ -46,7 +46,8 @@ class ExchangeModelTest {
         assertThat(matrix.text(4, 0)).isEqualTo(Figures.tabular(rate("outside", "well field")));
         assertThat(matrix.text(0, 0)).isEmpty();
         assertThat(matrix.unit()).isEqualTo("m³/d");
-        assertThat(model.belongs().get()).isEqualTo("All 4 prisms as drawn · interval 1, 2021-10-01 to 2021-11-01");
+        assertThat(model.belongs().get())
+                .isEqualTo("Water of all 4 prisms as drawn · interval 1, 2021-10-01 to 2021-11-01");
     }
 
     @Test

@@ -35,6 +35,7 @@ class HandoverModelTest {
         live = LiveSet.terrace();
         drawing = live.set
                 .workbench()
+                .drawings()
                 .drawing(live.set.path().resolve("prisms.geojson"))
                 .drawing();
         live.session.shapes().set(new DrawnShapes(drawing, true));
@@ -63,7 +64,7 @@ class HandoverModelTest {
 
     @Test
     void theCommandsFollowWhatIsChosen() {
-        assertThat(model.commands().get())
+        assertThat(model.prospect().commands().get())
                 .startsWith("seepledger balance "
                         + Path.of("sample-aquifers/terrace").toAbsolutePath())
                 .contains("--clip", "--report-date ")
@@ -77,7 +78,7 @@ class HandoverModelTest {
         model.choices().report().letterhead().text().set("Ground Water Office\n\n 1 Main Street ");
         model.choices().extract().set(true);
         model.choices().overwrite().set(true);
-        assertThat(model.commands().get())
+        assertThat(model.prospect().commands().get())
                 .contains(
                         "--every record",
                         "--wells spread",
@@ -87,19 +88,19 @@ class HandoverModelTest {
                         "--report-letterhead 'Ground Water Office|1 Main Street'",
                         "--overwrite\nseepledger extract ");
         budget.periods().text().set("periods.csv");
-        assertThat(model.commands().get())
+        assertThat(model.prospect().commands().get())
                 .contains("--periods " + Path.of("periods.csv").toAbsolutePath())
                 .doesNotContain("--every");
     }
 
     @Test
     void whatIsWrongIsSaidBesideTheFieldAndKeepsTheWorkFromBeingBegun() {
-        assertThat(model.problem().get()).isEmpty();
+        assertThat(model.prospect().problem().get()).isEmpty();
         Entry<?> rate = model.choices().budget().rateUnit();
         for (String text : List.of("m", "florins", "m3/d/d")) {
             rate.text().set(text);
             assertThat(rate.problem().get()).as(text).isNotEmpty();
-            assertThat(model.problem().get()).isNotEmpty();
+            assertThat(model.prospect().problem().get()).isNotEmpty();
         }
         model.handOver();
         assertThat(folder.resolve("out")).doesNotExist();
@@ -111,31 +112,31 @@ class HandoverModelTest {
         }
         limit.text().set("1");
         model.choices().report().date().text().set("31.5.2024");
-        assertThat(model.problem().get()).isNotEmpty();
+        assertThat(model.prospect().problem().get()).isNotEmpty();
         model.choices().report().date().text().set("2024-05-31");
         model.choices().report().letterhead().text().set("a|b");
-        assertThat(model.problem().get()).isNotEmpty();
+        assertThat(model.prospect().problem().get()).isNotEmpty();
         model.choices().report().letterhead().text().set("");
         model.choices().solutes().above().text().set("50");
         assertThat(model.choices().solutes().above().problem().get()).contains("50 mg/L");
         model.choices().solutes().above().text().set("50 mg/L");
-        assertThat(model.problem().get()).isEmpty();
+        assertThat(model.prospect().problem().get()).isEmpty();
         model.choices().water().set(false);
-        assertThat(model.problem().get()).contains("Choose something");
+        assertThat(model.prospect().problem().get()).contains("Choose something");
     }
 
     @Test
     void withoutPrismsThereIsNothingToHandOver() {
         live.session.shapes().set(DrawnShapes.NONE);
-        assertThat(model.problem().get()).contains("no prism");
+        assertThat(model.prospect().problem().get()).contains("no prism");
     }
 
     @Test
     void prismsThatAreNotSavedAreReadFromTheFolder() {
         live.session.shapes().set(new DrawnShapes(drawing, false));
-        assertThat(model.prismsNote().get())
+        assertThat(model.prospect().prismsNote().get())
                 .contains(folder.resolve("out/prisms.geojson").toString());
-        assertThat(model.commands().get()).contains("--prisms " + folder.resolve("out/prisms.geojson"));
+        assertThat(model.prospect().commands().get()).contains("--prisms " + folder.resolve("out/prisms.geojson"));
     }
 
     @Test
@@ -150,9 +151,9 @@ class HandoverModelTest {
             assertThat(pictures).isNotEmpty().allMatch(file -> file.toString().endsWith(".svg"));
         }
         model.chooseAgain();
-        assertThat(model.outProblem().get()).contains("--overwrite");
+        assertThat(model.prospect().outProblem().get()).contains("--overwrite");
         model.choices().overwrite().set(true);
-        assertThat(model.outProblem().get()).isEmpty();
+        assertThat(model.prospect().outProblem().get()).isEmpty();
         model.choices().budget().limit().text().set("50");
         model.handOver();
         assertThat(model.stage().get()).isEqualTo(HandoverModel.Stage.DONE);
@@ -191,13 +192,14 @@ class HandoverModelTest {
     @Test
     void foldersAndFilesAreAskedFor() {
         live.answers.paths.add(Optional.of(folder.resolve("other")));
-        model.chooseFolder();
+        model.questions().folder();
         assertThat(model.choices().out().text().get())
                 .isEqualTo(folder.resolve("other").toString());
         live.answers.paths.add(Optional.empty());
-        model.choosePeriods();
+        model.questions().periods();
         assertThat(model.choices().budget().periods().text().get()).isEmpty();
         model.copyCommands();
-        assertThat(live.answers.copied).containsExactly(model.commands().get());
+        assertThat(live.answers.copied)
+                .containsExactly(model.prospect().commands().get());
     }
 }

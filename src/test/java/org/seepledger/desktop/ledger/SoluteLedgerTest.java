@@ -58,7 +58,7 @@ class SoluteLedgerTest {
         assertThat(model.rows().stream()
                         .filter(row -> row.kind() == Kind.HEADING)
                         .map(LedgerRow::label))
-                .containsExactly("Held, in kg", "Advection", "Sources", "Decay, production", "Storage", "Together");
+                .containsExactly("Held, in kg", "Advection", "Sources", "Decay", "Storage", "Together");
         assertThat(model.unit().get()).isEqualTo("kg/d");
         assertThat(model.belongs().get()).startsWith("breakdown product: yard");
         assertThat(model.closure().get()).startsWith("Closure error").contains("kg/d");

@@ -76,7 +76,8 @@ class ContrastTest {
         try (var set = Opening.of(Path.of("sample-aquifers/valley")).set()) {
             session.show(Optional.of(set));
             var prisms = set.workbench()
-                    .read(Path.of("sample-aquifers/valley/prisms.geojson"))
+                    .drawings()
+                    .prisms(Path.of("sample-aquifers/valley/prisms.geojson"))
                     .prisms();
             session.drawing().set(new Drawing(1, prisms, true));
             session.selected().set("well field");

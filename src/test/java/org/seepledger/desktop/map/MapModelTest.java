@@ -33,7 +33,8 @@ class MapModelTest {
                         1,
                         opening.set()
                                 .workbench()
-                                .read(Path.of("sample-aquifers/valley/prisms.geojson"))
+                                .drawings()
+                                .prisms(Path.of("sample-aquifers/valley/prisms.geojson"))
                                 .prisms(),
                         true));
     }

@@ -125,6 +125,8 @@ class OriginModelTest {
 
     @Test
     void whatHasNoTraceSaysSo() {
+        ask(Group.TOTAL, "residual", Line.ALL_LAYERS);
+        assertThat(model.sum().get()).contains("is rounding");
         ask(Group.TOTAL, "closure error", Line.ALL_LAYERS);
         assertThat(model.state().get().words()).contains("ratio of sums", "residual");
         ask(Group.SIDE, "", 0);
@@ -165,6 +167,7 @@ class OriginModelTest {
                 .set(new DrawnShapes(
                         live.set
                                 .workbench()
+                                .drawings()
                                 .drawing(live.set.path().resolve("prisms.geojson"))
                                 .drawing(),
                         true));

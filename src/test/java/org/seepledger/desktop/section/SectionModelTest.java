@@ -22,6 +22,7 @@ import org.seepledger.picture.NearbyWell;
 import org.seepledger.picture.Ramp;
 import org.seepledger.picture.SectionFrame;
 import org.seepledger.picture.ValueScale;
+import org.seepledger.sample.SampleCopy;
 
 class SectionModelTest {
 
@@ -75,11 +76,7 @@ class SectionModelTest {
 
     @Test
     void dataThatCannotBeReadAreToldInWords() throws IOException {
-        try (var sample = Files.list(Path.of("sample-aquifers/valley"))) {
-            for (Path file : sample.toList()) {
-                Files.copy(file, folder.resolve(file.getFileName()));
-            }
-        }
+        SampleCopy.of("valley", folder);
         drawn.close();
         drawn = new DrawnSection(folder);
         drawn.model.alongPrism();

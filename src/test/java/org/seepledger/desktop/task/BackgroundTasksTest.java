@@ -1,6 +1,7 @@
 package org.seepledger.desktop.task;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.fail;
 
 import java.time.Duration;
 import java.util.ArrayList;
@@ -105,6 +106,14 @@ class BackgroundTasksTest {
             late.run();
         }
         assertThat(heard).hasSize(2);
+    }
+
+    @Test
+    void whatIsAskedForAfterTheEndIsNotDone() {
+        Lane lane = tasks.each("test", 1);
+        tasks.close();
+        lane.run(progress -> fail("done after the end"), done -> {}, failed -> fail("told after the end"));
+        assertThat(tasks.running()).isEmpty();
     }
 
     @Test

@@ -15,6 +15,7 @@ import org.seepledger.desktop.port.GivenAnswers;
 import org.seepledger.desktop.session.Opening;
 import org.seepledger.desktop.task.DirectTasks;
 import org.seepledger.desktop.task.PaneState;
+import org.seepledger.sample.SampleCopy;
 
 class WelcomeModelTest {
 
@@ -86,11 +87,7 @@ class WelcomeModelTest {
 
     @Test
     void brokenPrismsBesideASoundSetAreSaidToo(@TempDir Path folder) throws IOException {
-        try (var files = Files.list(VALLEY)) {
-            for (Path file : files.toList()) {
-                Files.copy(file, folder.resolve(file.getFileName()));
-            }
-        }
+        SampleCopy.of("valley", folder);
         Files.writeString(folder.resolve("prisms.geojson"), "{\"type\": \"Feature\"}");
         model.open(folder);
         assertThat(opened).isEmpty();
