@@ -47,7 +47,7 @@ class ReviewModelTest {
         session.drawing()
                 .set(new Drawing(
                         1,
-                        set.workbench().read(VALLEY.resolve("prisms.geojson")).prisms(),
+                        set.workbench().drawings().prisms(VALLEY.resolve("prisms.geojson")).prisms(),
                         true));
         model.show(true);
     }
