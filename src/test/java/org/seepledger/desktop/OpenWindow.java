@@ -75,7 +75,11 @@ public final class OpenWindow implements AutoCloseable {
     /** Opens a set and waits until it is there. */
     public void openSet(Path folder) {
         robot.interact(() -> assembly.welcome().open(folder));
-        await(() -> assembly.session().set().get().isPresent());
+        await(() -> assembly.session()
+                .set()
+                .get()
+                .filter(set -> set.path().equals(folder))
+                .isPresent());
     }
 
     /** Waits until something holds. */

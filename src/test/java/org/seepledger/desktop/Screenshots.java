@@ -72,12 +72,12 @@ public final class Screenshots {
                 press(window, KeyCode.F1);
                 window.settle();
                 both(window, folder, "actions", suffix);
-                window.robot.press(KeyCode.ESCAPE).release(KeyCode.ESCAPE);
+                press(window, KeyCode.ESCAPE);
                 window.robot.interact(window.assembly().view()::showPreferences);
                 both(window, folder, "preferences", suffix);
                 window.robot.interact(window.assembly().view()::showNotices);
                 both(window, folder, "messages", suffix);
-                press(window, javafx.scene.input.KeyCode.ESCAPE);
+                press(window, KeyCode.ESCAPE);
                 review(window, folder, suffix);
                 solutes(window, folder, suffix);
             }
@@ -108,7 +108,8 @@ public final class Screenshots {
 
     private static void solutes(OpenWindow window, Path folder, String suffix) throws IOException {
         window.openSet(Path.of("sample-aquifers/depot"));
-        window.settle();
+        window.await(() -> window.assembly().map().values().quantities().stream()
+                .anyMatch(each -> each.kind() == MapQuantity.Kind.CONCENTRATION));
         window.robot.interact(() -> {
             window.assembly().session().solute().set("solvent");
             window.assembly().session().interval().set(5);
@@ -121,7 +122,7 @@ public final class Screenshots {
                             .findFirst());
         });
         window.settle();
-        window.robot.clickOn("#solute-threshold").write("0.1 mg/L").type(javafx.scene.input.KeyCode.ENTER);
+        window.robot.clickOn("#solute-threshold").write("0.1 mg/L").type(KeyCode.ENTER);
         for (String page : new String[] {"ledger", "answers", "transects"}) {
             window.robot.clickOn("#folio-" + page);
             window.settle();
