@@ -47,7 +47,10 @@ class ReviewModelTest {
         session.drawing()
                 .set(new Drawing(
                         1,
-                        set.workbench().drawings().prisms(VALLEY.resolve("prisms.geojson")).prisms(),
+                        set.workbench()
+                                .drawings()
+                                .prisms(VALLEY.resolve("prisms.geojson"))
+                                .prisms(),
                         true));
         model.show(true);
     }
