@@ -8,6 +8,7 @@ import org.seepledger.io.result.ResultUnits;
 import org.seepledger.picture.Drape;
 import org.seepledger.picture.MapFrame;
 import org.seepledger.picture.MapPicture;
+import org.seepledger.picture.MapRoom;
 import org.seepledger.picture.Picture;
 import org.seepledger.picture.UnitShown;
 import org.seepledger.prism.Prism;
@@ -35,7 +36,7 @@ final class MapOnPaper {
     Picture drawn() {
         Aquifer aquifer = set.aquifer();
         MapAsked.Part part = asked.part();
-        MapFrame frame = MapPicture.frame(part.west(), part.south(), part.east(), part.north(), WIDTH);
+        MapFrame frame = MapRoom.of(part.west(), part.south(), part.east(), part.north(), WIDTH);
         Optional<Prism> selected = asked.prisms().stream()
                 .filter(prism -> prism.name().equals(asked.selected()))
                 .findFirst();

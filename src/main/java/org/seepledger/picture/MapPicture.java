@@ -1,10 +1,8 @@
 package org.seepledger.picture;
 
 import java.util.ArrayList;
-import java.util.DoubleSummaryStatistics;
 import java.util.List;
 import java.util.Optional;
-import java.util.function.ToDoubleFunction;
 import java.util.stream.DoubleStream;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.balance.HotSpot;
@@ -12,21 +10,15 @@ import org.seepledger.ledger.PeriodBudget;
 import org.seepledger.picture.Mark.Fill;
 import org.seepledger.picture.Mark.Stroke;
 import org.seepledger.prism.Prism;
-import org.seepledger.prism.Side;
 
 /** Maps of a prism: with the flow through its faces, and with what its cells do not balance. */
 public final class MapPicture {
 
-    private static final double LOWEST = 260;
-    private static final double HIGHEST = 460;
-    private static final double AROUND = 0.2;
     private static final double STRIP = 58;
 
     /** Colours under contours are thinned, so that what is drawn on them stands out. */
     private static final double VEILED = 0.55;
 
-    private static final double TOP = 6;
-    private static final double RIGHT = 8;
     private static final double GAP = 12;
     private static final double LEGEND = 360;
 
@@ -49,7 +41,7 @@ public final class MapPicture {
             Drape values, ValueScale scale, String quantity, String unit, String layer, boolean contoured) {}
 
     private MapPicture(Aquifer aquifer, Prism subject, List<Prism> others, Optional<Ground> ground, double width) {
-        this(aquifer, frame(subject, width), Optional.of(subject), others, ground, width);
+        this(aquifer, MapRoom.of(subject, width), Optional.of(subject), others, ground, width);
     }
 
     private MapPicture(
@@ -66,50 +58,6 @@ public final class MapPicture {
         ground.ifPresent(this::lay);
         others.forEach(other -> sheet.prism(other, false));
         subject.ifPresent(prism -> sheet.prism(prism, true));
-    }
-
-    /**
-     * {@return where map coordinates come to in the maps of a prism}
-     *
-     * @param subject the prism
-     * @param width of the map, in logical pixels
-     */
-    public static MapFrame frame(Prism subject, double width) {
-        DoubleSummaryStatistics x = coordinates(subject, Side::x);
-        DoubleSummaryStatistics y = coordinates(subject, Side::y);
-        double across = x.getMax() - x.getMin();
-        double up = y.getMax() - y.getMin();
-        double margin = AROUND * Math.max(across, up);
-        double room = width - MapSheet.MARGIN - RIGHT;
-        double height = Math.max(LOWEST, Math.min(HIGHEST, room * (up + 2 * margin) / (across + 2 * margin)));
-        return MapFrame.fitting(
-                new Box(MapSheet.MARGIN, TOP, room, height),
-                x.getMin() - margin,
-                y.getMin() - margin,
-                x.getMax() + margin,
-                y.getMax() + margin);
-    }
-
-    /**
-     * {@return where map coordinates come to in a map of what a view shows}
-     *
-     * @param west the least map x that is seen
-     * @param south the least map y
-     * @param east the greatest map x
-     * @param north the greatest map y
-     * @param width of the map, in logical pixels
-     */
-    public static MapFrame frame(double west, double south, double east, double north, double width) {
-        double room = width - MapSheet.MARGIN - RIGHT;
-        double height = Math.max(LOWEST, Math.min(HIGHEST, room * (north - south) / (east - west)));
-        return MapFrame.fitting(new Box(MapSheet.MARGIN, TOP, room, height), west, south, east, north);
-    }
-
-    private static DoubleSummaryStatistics coordinates(Prism prism, ToDoubleFunction<Side> coordinate) {
-        return prism.rings().stream()
-                .flatMap(ring -> ring.sides().stream())
-                .mapToDouble(coordinate)
-                .summaryStatistics();
     }
 
     private void lay(Ground under) {
@@ -250,7 +198,7 @@ public final class MapPicture {
 
     private static Picture withKey(Picture drawn, Trail trail) {
         List<Mark> marks = new ArrayList<>(drawn.marks());
-        Key key = new Key(MapSheet.MARGIN, drawn.width() - RIGHT, drawn.height(), marks);
+        Key key = new Key(MapSheet.MARGIN, drawn.width() - MapRoom.RIGHT, drawn.height(), marks);
         if (trail.outline().isPresent()) {
             key.line(ThresholdOutline.stroke(), "cells with more than " + trail.threshold());
         }

@@ -7,13 +7,13 @@ import org.seepledger.picture.Mark.Fill;
 import org.seepledger.picture.Mark.Stroke;
 
 /** Which way is north: a slender kite, one half full, with an N below. */
-public final class NorthArrow {
+final class NorthArrow {
 
     /** How wide it is, in logical pixels. */
-    public static final double WIDTH = 14;
+    static final double WIDTH = 14;
 
     /** How high it is, in logical pixels. */
-    public static final double HEIGHT = 42;
+    static final double HEIGHT = 42;
 
     private NorthArrow() {}
 
@@ -23,7 +23,7 @@ public final class NorthArrow {
      * @param x its left edge
      * @param y its upper edge
      */
-    public static List<Mark> marks(double x, double y) {
+    static List<Mark> marks(double x, double y) {
         double middle = x + WIDTH / 2;
         double notch = y + 21;
         double foot = y + 27;

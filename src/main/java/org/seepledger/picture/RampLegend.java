@@ -6,10 +6,10 @@ import org.seepledger.picture.Mark.Anchor;
 import org.seepledger.picture.Mark.Stroke;
 
 /** Says which value a colour of a ramp stands for: a strip of it with ticks at round values. */
-public final class RampLegend {
+final class RampLegend {
 
     /** How high a level legend is, in logical pixels. */
-    public static final double LEVEL_HEIGHT = 46;
+    static final double LEVEL_HEIGHT = 46;
 
     private static final double SIZE = 11;
     private static final double STRIP = 12;
@@ -31,7 +31,7 @@ public final class RampLegend {
      * @param words what the values are, with their unit
      * @param place where it goes; its height is {@link #LEVEL_HEIGHT}, its width at least 80
      */
-    public static List<Mark> level(ValueScale scale, double opacity, String words, Box place) {
+    static List<Mark> level(ValueScale scale, double opacity, String words, Box place) {
         RampLegend legend = new RampLegend(scale);
         Box strip = new Box(place.x(), place.y() + 17, place.width(), STRIP);
         legend.marks.add(title(words, place));

@@ -1,2 +1,2 @@
-/** Layout of results for people: on the terminal, the summary of a balance and what is found in a set. */
+/** Results in words and tables for people: the answer, summaries for the terminal, and what is found in a set. */
 package org.seepledger.report;

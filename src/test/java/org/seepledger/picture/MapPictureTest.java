@@ -64,7 +64,7 @@ class MapPictureTest {
     @Test
     void arrowsPointInForGainsAndOutForLosses() {
         Picture map = map(flows(0, -60, 0, 80));
-        MapFrame frame = MapPicture.frame(PRISM, WIDTH);
+        MapFrame frame = MapRoom.of(PRISM, WIDTH);
         List<double[]> arrows = arrows(map);
         assertThat(arrows).hasSize(2);
         double[] west = arrows.get(0);
@@ -170,7 +170,7 @@ class MapPictureTest {
                 new MapPicture.Ground(drape, ValueScale.aboutZero(drape.values()), "imbalance", "m3/d", "sand", false);
         Picture map = MapPicture.ofImbalance(
                 Scene.aquifer(), PRISM, ground, List.of(new HotSpot(0, 10, 12, 3), new HotSpot(0, 7, 20, -2)), WIDTH);
-        MapFrame frame = MapPicture.frame(PRISM, WIDTH);
+        MapFrame frame = MapRoom.of(PRISM, WIDTH);
         Mark.Text second = Scene.texts(map).stream()
                 .filter(text -> text.words().equals("2"))
                 .findFirst()

@@ -16,7 +16,7 @@ import org.seepledger.desktop.command.CommandText;
 import org.seepledger.unit.Measure;
 
 /** What is chosen of budgets, of water and solutes alike. */
-public final class BudgetChoices {
+final class BudgetChoices {
 
     private static final int OCTOBER = 10;
 
@@ -32,42 +32,42 @@ public final class BudgetChoices {
     BudgetChoices() {}
 
     /** {@return how often a budget is struck} */
-    public ObjectProperty<Periods.Every> every() {
+    ObjectProperty<Periods.Every> every() {
         return every;
     }
 
     /** {@return the month in which a water year begins, 1 to 12} */
-    public IntegerProperty waterYearStart() {
+    IntegerProperty waterYearStart() {
         return waterYearStart;
     }
 
     /** {@return a CSV of periods, in place of regular ones} */
-    public Entry<Path> periods() {
+    Entry<Path> periods() {
         return periods;
     }
 
     /** {@return the unit of rates of water} */
-    public Entry<Measure> rateUnit() {
+    Entry<Measure> rateUnit() {
         return rateUnit;
     }
 
     /** {@return the unit of volumes} */
-    public Entry<Measure> volumeUnit() {
+    Entry<Measure> volumeUnit() {
         return volumeUnit;
     }
 
     /** {@return the largest closure error allowed, in percent} */
-    public Entry<Double> limit() {
+    Entry<Double> limit() {
         return limit;
     }
 
     /** {@return how wells in cut cells count} */
-    public ObjectProperty<WellRule> wells() {
+    ObjectProperty<WellRule> wells() {
         return wells;
     }
 
     /** {@return whether prisms are cut at the grid's edge, as the window's own budgets are} */
-    public BooleanProperty clip() {
+    BooleanProperty clip() {
         return clip;
     }
 

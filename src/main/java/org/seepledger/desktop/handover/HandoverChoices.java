@@ -12,7 +12,7 @@ import org.seepledger.job.HandoverRequest;
 import org.seepledger.job.ShownPicture;
 
 /** All that is chosen of what is handed over. */
-public final class HandoverChoices {
+final class HandoverChoices {
 
     private final BooleanProperty water = new SimpleBooleanProperty(true);
     private final BooleanProperty plume = new SimpleBooleanProperty();
@@ -34,47 +34,47 @@ public final class HandoverChoices {
     }
 
     /** {@return whether the water budget is wanted} */
-    public BooleanProperty water() {
+    BooleanProperty water() {
         return water;
     }
 
     /** {@return whether the solute budget is wanted; never where the set has no solutes} */
-    public BooleanProperty plume() {
+    BooleanProperty plume() {
         return plume;
     }
 
     /** {@return whether an extract of the aquifer is wanted} */
-    public BooleanProperty extract() {
+    BooleanProperty extract() {
         return extract;
     }
 
     /** {@return whether an earlier handing over may be replaced} */
-    public BooleanProperty overwrite() {
+    BooleanProperty overwrite() {
         return overwrite;
     }
 
     /** {@return the folder that all goes to} */
-    public Entry<Path> out() {
+    Entry<Path> out() {
         return out;
     }
 
     /** {@return what is chosen of budgets} */
-    public BudgetChoices budget() {
+    BudgetChoices budget() {
         return budget;
     }
 
     /** {@return what is chosen of the report} */
-    public ReportChoices report() {
+    ReportChoices report() {
         return report;
     }
 
     /** {@return what is chosen of solutes} */
-    public SoluteChoices solutes() {
+    SoluteChoices solutes() {
         return solutes;
     }
 
     /** {@return which pictures are chosen} */
-    public PictureChoices pictures() {
+    PictureChoices pictures() {
         return pictures;
     }
 

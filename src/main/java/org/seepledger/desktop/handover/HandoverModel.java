@@ -50,7 +50,7 @@ public final class HandoverModel {
     private volatile Advance advance = new Advance(Progress.NONE);
 
     /** Where the page is. */
-    public enum Stage {
+    enum Stage {
         /** Things are chosen. */
         CHOOSING,
         /** Files are made. */
@@ -108,7 +108,7 @@ public final class HandoverModel {
     }
 
     /** {@return what is chosen} */
-    public HandoverChoices choices() {
+    HandoverChoices choices() {
         return choices;
     }
 
@@ -123,22 +123,22 @@ public final class HandoverModel {
     }
 
     /** {@return what went wrong with the work; empty for nothing} */
-    public ReadOnlyStringProperty fault() {
+    ReadOnlyStringProperty fault() {
         return fault.getReadOnlyProperty();
     }
 
     /** {@return where the page is} */
-    public ReadOnlyObjectProperty<Stage> stage() {
+    ReadOnlyObjectProperty<Stage> stage() {
         return stage.getReadOnlyProperty();
     }
 
     /** {@return what came of it} */
-    public ReadOnlyObjectProperty<Optional<HandoverOutcome>> outcome() {
+    ReadOnlyObjectProperty<Optional<HandoverOutcome>> outcome() {
         return outcome.getReadOnlyProperty();
     }
 
     /** {@return what is to be said of the closure error allowed; empty for nothing} */
-    public String limitWords() {
+    String limitWords() {
         Optional<Double> limit = choices.budget().limit().value();
         double worst = outcome.get().stream()
                 .flatMap(done -> Stream.of(
@@ -157,22 +157,22 @@ public final class HandoverModel {
     }
 
     /** {@return what is being done just now} */
-    public String doing() {
+    String doing() {
         return advance.stage();
     }
 
     /** {@return how much of that is done, from 0 to 1} */
-    public double share() {
+    double share() {
         return advance.share();
     }
 
     /** {@return whether the open set has solutes to strike budgets of} */
-    public boolean hasSolutes() {
+    boolean hasSolutes() {
         return session.set().get().filter(set -> set.workbench().hasSolutes()).isPresent();
     }
 
     /** {@return the periods that there are to choose from} */
-    public List<Periods.Every> periodChoices() {
+    List<Periods.Every> periodChoices() {
         boolean dated = session.set()
                 .get()
                 .filter(set -> set.aquifer().times().hasDates())
@@ -181,13 +181,13 @@ public final class HandoverModel {
     }
 
     /** Copies the commands. */
-    public void copyCommands() {
+    void copyCommands() {
         copies.text(prospect.commands().get());
         session.notices().done(Words.of("handover.copied"));
     }
 
     /** Hands over. */
-    public void handOver() {
+    void handOver() {
         Optional<HandoverPlan> plan = prospect.plan();
         if (!prospect.problem().get().isEmpty() || plan.isEmpty() || stage.get() == Stage.WORKING) {
             return;
@@ -228,13 +228,13 @@ public final class HandoverModel {
     }
 
     /** Stops the work; nothing is left behind. */
-    public void cancel() {
+    void cancel() {
         working.cancel();
         stopped();
     }
 
     /** Goes back to what is chosen. */
-    public void chooseAgain() {
+    void chooseAgain() {
         stage.set(Stage.CHOOSING);
         suggestTransects();
         prospect.look();
@@ -260,12 +260,12 @@ public final class HandoverModel {
     }
 
     /** Opens the folder that was made. */
-    public void openFolder() {
+    void openFolder() {
         outcome.get().ifPresent(done -> opener.open(done.out()));
     }
 
     /** Opens the report that was made. */
-    public void openReport() {
+    void openReport() {
         outcome.get().flatMap(HandoverOutcome::report).ifPresent(opener::open);
     }
 }

@@ -10,7 +10,7 @@ import org.seepledger.job.HandoverRequest;
 import org.seepledger.job.ShownPicture;
 
 /** Which pictures are chosen. */
-public final class PictureChoices {
+final class PictureChoices {
 
     private final ObservableMap<String, ShownPicture> offered;
     private final BooleanProperty maps = new SimpleBooleanProperty(true);
@@ -29,32 +29,32 @@ public final class PictureChoices {
     }
 
     /** {@return whether the report's map of each prism is wanted} */
-    public BooleanProperty maps() {
+    BooleanProperty maps() {
         return maps;
     }
 
     /** {@return whether the report's section through each prism is wanted} */
-    public BooleanProperty sections() {
+    BooleanProperty sections() {
         return sections;
     }
 
     /** {@return whether what views show is wanted} */
-    public BooleanProperty shown() {
+    BooleanProperty shown() {
         return shown;
     }
 
     /** {@return whether pictures are written as SVG} */
-    public BooleanProperty svg() {
+    BooleanProperty svg() {
         return svg;
     }
 
     /** {@return whether pictures are written as PNG} */
-    public BooleanProperty png() {
+    BooleanProperty png() {
         return png;
     }
 
     /** {@return what views offer, by what it is called} */
-    public ObservableMap<String, ShownPicture> offered() {
+    ObservableMap<String, ShownPicture> offered() {
         return offered;
     }
 

@@ -11,7 +11,7 @@ import org.seepledger.job.ReportRequest;
 import org.seepledger.report.page.Amounts;
 
 /** What is chosen of the report. */
-public final class ReportChoices {
+final class ReportChoices {
 
     private final Entry<String> title = new Entry<>(Meaning::line);
     private final Entry<String> author = new Entry<>(Meaning::line);
@@ -22,7 +22,7 @@ public final class ReportChoices {
     private final ObjectProperty<Amounts> amounts = new SimpleObjectProperty<>(Amounts.RATE);
 
     /** What gets a table of all its rows. */
-    public enum Tables {
+    enum Tables {
         /** The whole record. */
         RECORD(ReportRequest.RECORD),
         /** The period that closes worst. */
@@ -42,37 +42,37 @@ public final class ReportChoices {
     ReportChoices() {}
 
     /** {@return its title} */
-    public Entry<String> title() {
+    Entry<String> title() {
         return title;
     }
 
     /** {@return who answers for it} */
-    public Entry<String> author() {
+    Entry<String> author() {
         return author;
     }
 
     /** {@return the client's reference} */
-    public Entry<String> reference() {
+    Entry<String> reference() {
         return reference;
     }
 
     /** {@return the lines at its head} */
-    public Entry<List<String>> letterhead() {
+    Entry<List<String>> letterhead() {
         return letterhead;
     }
 
     /** {@return its date} */
-    public Entry<LocalDate> date() {
+    Entry<LocalDate> date() {
         return date;
     }
 
     /** {@return what gets a table of all its rows} */
-    public ObjectProperty<Tables> tables() {
+    ObjectProperty<Tables> tables() {
         return tables;
     }
 
     /** {@return whether its tables give rates or volumes} */
-    public ObjectProperty<Amounts> amounts() {
+    ObjectProperty<Amounts> amounts() {
         return amounts;
     }
 

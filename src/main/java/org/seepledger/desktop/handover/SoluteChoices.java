@@ -10,7 +10,7 @@ import org.seepledger.job.PlumeRequest;
 import org.seepledger.unit.Measure;
 
 /** What is chosen of solutes. */
-public final class SoluteChoices {
+final class SoluteChoices {
 
     private final Entry<Measure> rateUnit = new Entry<>(Meaning.unit("kg/d"));
     private final Entry<Measure> massUnit = new Entry<>(Meaning.unit("kg"));
@@ -22,32 +22,32 @@ public final class SoluteChoices {
     SoluteChoices() {}
 
     /** {@return the unit of mass rates} */
-    public Entry<Measure> rateUnit() {
+    Entry<Measure> rateUnit() {
         return rateUnit;
     }
 
     /** {@return the unit of masses} */
-    public Entry<Measure> massUnit() {
+    Entry<Measure> massUnit() {
         return massUnit;
     }
 
     /** {@return the concentration above which volume and area are counted} */
-    public Entry<PlumeRequest.Threshold> above() {
+    Entry<PlumeRequest.Threshold> above() {
         return above;
     }
 
     /** {@return a file of lines; what crosses them is counted} */
-    public Entry<Path> transects() {
+    Entry<Path> transects() {
         return transects;
     }
 
     /** {@return a file of measured panels of transects} */
-    public Entry<Path> panels() {
+    Entry<Path> panels() {
         return panels;
     }
 
     /** {@return whether dispersion is booked} */
-    public BooleanProperty dispersion() {
+    BooleanProperty dispersion() {
         return dispersion;
     }
 

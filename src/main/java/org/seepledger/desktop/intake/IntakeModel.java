@@ -1,7 +1,6 @@
 package org.seepledger.desktop.intake;
 
 import java.nio.file.Path;
-import java.time.Duration;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.LinkedHashSet;
@@ -30,7 +29,6 @@ import org.seepledger.intake.Plan;
 import org.seepledger.intake.Proposal;
 import org.seepledger.intake.Use;
 import org.seepledger.intake.Wishes;
-import org.seepledger.job.Inspection;
 import org.seepledger.job.IntakeJob;
 import org.seepledger.job.RasterPreview;
 import org.seepledger.progress.Cancelled;
@@ -38,13 +36,10 @@ import org.seepledger.progress.Cancelled;
 /** Loose files, what they are taken for, and the aquifer folder that they make. */
 public final class IntakeModel {
 
-    private static final Duration REST = Duration.ofMillis(250);
-
     private final FileDialogs dialogs;
     private final Consumer<Path> open;
     private final Lane looking;
-    private final Lane making;
-    private final Lane checking;
+    private final MakingModel making;
     private final WritingModel writing;
     private final Lane previewing;
     private final Set<Path> brought = new LinkedHashSet<>();
@@ -52,21 +47,8 @@ public final class IntakeModel {
     private final BooleanProperty shown = new SimpleBooleanProperty();
     private final IntegerProperty chosen = new SimpleIntegerProperty(-1);
     private final ReadOnlyObjectWrapper<Optional<Plan>> plan = new ReadOnlyObjectWrapper<>(Optional.empty());
-    private final ReadOnlyObjectWrapper<Optional<Made>> made = new ReadOnlyObjectWrapper<>(Optional.empty());
     private final ReadOnlyObjectWrapper<PaneState> state =
             new ReadOnlyObjectWrapper<>(PaneState.empty(Words.of("intake.empty")));
-    private final ReadOnlyObjectWrapper<Check> check = new ReadOnlyObjectWrapper<>(Check.NONE);
-
-    /**
-     * What the check says.
-     *
-     * @param state how it stands
-     * @param says what {@code inspect} says; empty as long as it has not said it
-     */
-    record Check(PaneState state, Optional<Inspection> says) {
-
-        static final Check NONE = new Check(PaneState.READY, Optional.empty());
-    }
 
     /**
      * Makes the model.
@@ -79,8 +61,7 @@ public final class IntakeModel {
         this.dialogs = dialogs;
         this.open = open;
         this.looking = tasks.latest("task.intake.looking");
-        this.making = tasks.latest("task.intake.making");
-        this.checking = tasks.latest("task.intake.checking");
+        this.making = new MakingModel(tasks);
         this.writing = new WritingModel(tasks, dialogs, this::leaveTo);
         this.previewing = tasks.latest("task.intake.preview");
     }
@@ -95,19 +76,14 @@ public final class IntakeModel {
         return plan.getReadOnlyProperty();
     }
 
-    /** {@return what they make, once it is worked out} */
-    ReadOnlyObjectProperty<Optional<Made>> made() {
-        return made.getReadOnlyProperty();
+    /** {@return what they make, and what the check says of it} */
+    MakingModel making() {
+        return making;
     }
 
     /** {@return how the looking stands} */
     ReadOnlyObjectProperty<PaneState> state() {
         return state.getReadOnlyProperty();
-    }
-
-    /** {@return what the check says} */
-    ReadOnlyObjectProperty<Check> check() {
-        return check.getReadOnlyProperty();
     }
 
     /** {@return which item is looked at, from 0; −1 for the set as a whole} */
@@ -133,11 +109,8 @@ public final class IntakeModel {
         brought.clear();
         leftOut.clear();
         looking.cancel();
-        making.cancel();
-        checking.cancel();
+        making.forget();
         plan.set(Optional.empty());
-        made.set(Optional.empty());
-        check.set(Check.NONE);
         writing.forget();
         state.set(PaneState.empty(Words.of("intake.empty")));
     }
@@ -166,7 +139,7 @@ public final class IntakeModel {
                 this::found,
                 fault -> {
                     brought.removeAll(paths);
-                    state.set(isStopped(fault) ? rest() : PaneState.failed(FaultWords.of(fault)));
+                    state.set(fault instanceof Cancelled ? rest() : PaneState.failed(FaultWords.of(fault)));
                 });
     }
 
@@ -183,41 +156,7 @@ public final class IntakeModel {
     private void take(Plan next) {
         plan.set(Optional.of(next));
         writing.forget();
-        checking.cancel();
-        making.runAfter(
-                REST,
-                progress -> {
-                    EntryGuard.enter();
-                    return Made.of(next);
-                },
-                this::take,
-                fault -> check.set(new Check(PaneState.failed(FaultWords.of(fault)), Optional.empty())));
-    }
-
-    private void take(Made next) {
-        made.set(Optional.of(next));
-        Composition copied = next.copied();
-        if (!copied.isSound()) {
-            check.set(new Check(PaneState.empty(Words.of("intake.check.waits")), Optional.empty()));
-            return;
-        }
-        check.set(new Check(
-                PaneState.working(Words.of("intake.checking")), check.get().says()));
-        int threads = Math.max(1, Runtime.getRuntime().availableProcessors() - 1);
-        checking.run(
-                progress -> {
-                    EntryGuard.enter();
-                    return IntakeJob.check(copied, threads, progress);
-                },
-                says -> check.set(new Check(PaneState.READY, Optional.of(says))),
-                fault -> check.set(
-                        isStopped(fault)
-                                ? Check.NONE
-                                : new Check(PaneState.failed(FaultWords.of(fault)), Optional.empty())));
-    }
-
-    private static boolean isStopped(Throwable fault) {
-        return fault instanceof Cancelled;
+        making.begin(next);
     }
 
     private PaneState rest() {
@@ -287,7 +226,7 @@ public final class IntakeModel {
 
     /** {@return the lines of the list} */
     List<ItemRow> rows() {
-        return ItemRows.of(plan.get(), made.get());
+        return ItemRows.of(plan.get(), making.made().get());
     }
 
     /**
@@ -309,12 +248,13 @@ public final class IntakeModel {
 
     /** Writes the new folder and opens it. */
     void write() {
-        made.get().map(Made::copied).filter(Composition::isSound).ifPresent(writing::write);
+        making.made().get().map(Made::copied).filter(Composition::isSound).ifPresent(writing::write);
     }
 
     /** Writes the description of files where they lie, and opens their folder. */
     void describe() {
-        made.get()
+        making.made()
+                .get()
                 .filter(now -> now.placed().isSound())
                 .ifPresent(now -> writing.describe(now.placed(), now.plan().root()));
     }

@@ -53,7 +53,7 @@ public final class IntakeView extends BorderPane {
         setOnDragOver(IntakeView::onDragOver);
         setOnDragDropped(this::onDropped);
         model.plan().addListener((now, before, after) -> show());
-        model.made().addListener((now, before, after) -> show());
+        model.making().made().addListener((now, before, after) -> show());
         model.chosen().addListener((now, before, after) -> show());
         model.shown().addListener((now, before, after) -> {
             if (after) {
@@ -113,7 +113,9 @@ public final class IntakeView extends BorderPane {
                 .findFirst()
                 .ifPresent(row -> list.getSelectionModel().select(row));
         filling = false;
-        model.plan().get().ifPresent(plan -> set.show(plan, model.made().get()));
+        model.plan()
+                .get()
+                .ifPresent(plan -> set.show(plan, model.making().made().get()));
         Object wanted = model.item().map(IntakeView::structure).orElse("set");
         if (!built.equals(Optional.of(wanted))) {
             built = Optional.of(wanted);
@@ -164,7 +166,7 @@ public final class IntakeView extends BorderPane {
 
     private List<Finding> problems() {
         Optional<String> id = model.item().map(Item::id);
-        return model.made().get().map(now -> now.copied().findings()).orElse(List.of()).stream()
+        return model.making().made().get().map(now -> now.copied().findings()).orElse(List.of()).stream()
                 .filter(finding -> finding.item().equals(id))
                 .toList();
     }

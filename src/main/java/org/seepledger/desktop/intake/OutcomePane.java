@@ -54,8 +54,8 @@ final class OutcomePane extends VBox {
         scroll.setFitToHeight(true);
         VBox.setVgrow(scroll, Priority.ALWAYS);
         getChildren().addAll(Form.heading("intake.heading.outcome"), verdict, scroll, writing());
-        model.made().addListener((now, before, after) -> show());
-        model.check().addListener((now, before, after) -> show());
+        model.making().made().addListener((now, before, after) -> show());
+        model.making().check().addListener((now, before, after) -> show());
         model.writing().state().addListener((now, before, after) -> show());
         show();
     }
@@ -96,20 +96,20 @@ final class OutcomePane extends VBox {
     }
 
     private void show() {
-        PaneState check = model.check().get().state();
+        PaneState check = model.making().check().get().state();
         boolean failed = check.phase() == PaneState.Phase.FAILED;
         verdict.getStyleClass().remove("sl-fault");
         if (failed) {
             verdict.getStyleClass().add("sl-fault");
         }
-        Optional<Inspection> says = model.check().get().says();
+        Optional<Inspection> says = model.making().check().get().says();
         checked.setText(says.map(Inspection::text).orElse(""));
         boolean told = says.isPresent();
         checked.setVisible(told);
         checked.setManaged(told);
         findings.show(findings());
-        verdict.setText(model.made().get().map(this::verdict).orElse(""));
-        model.made().get().ifPresent(this::showWriting);
+        verdict.setText(model.making().made().get().map(this::verdict).orElse(""));
+        model.making().made().get().ifPresent(this::showWriting);
         PaneState state = model.writing().state().get();
         boolean working = state.phase() == PaneState.Phase.WORKING;
         written.getStyleClass().remove("sl-fault");
@@ -121,7 +121,8 @@ final class OutcomePane extends VBox {
         cancel.setVisible(working);
         cancel.setManaged(working);
         boolean sound = !failed
-                && model.made()
+                && model.making()
+                        .made()
                         .get()
                         .map(Made::copied)
                         .filter(Composition::isSound)
@@ -129,7 +130,8 @@ final class OutcomePane extends VBox {
         write.setDisable(working || !sound);
         describe.setDisable(working
                 || failed
-                || model.made()
+                || model.making()
+                        .made()
                         .get()
                         .map(Made::placed)
                         .filter(Composition::isSound)
@@ -139,8 +141,9 @@ final class OutcomePane extends VBox {
     /** What stands in the way, and what the check warns of. */
     private List<Finding> findings() {
         List<Finding> all = new ArrayList<>(
-                model.made().get().map(now -> now.copied().findings()).orElse(List.of()));
-        model.check()
+                model.making().made().get().map(now -> now.copied().findings()).orElse(List.of()));
+        model.making()
+                .check()
                 .get()
                 .says()
                 .ifPresent(says -> says.warnings()
@@ -150,7 +153,7 @@ final class OutcomePane extends VBox {
     }
 
     private String verdict(Made made) {
-        PaneState check = model.check().get().state();
+        PaneState check = model.making().check().get().state();
         if (check.phase() == PaneState.Phase.FAILED || check.phase() == PaneState.Phase.WORKING) {
             return check.words();
         }

@@ -117,7 +117,7 @@ final class UsePane extends VBox {
     }
 
     private ComboBox<Integer> layer() {
-        int last = model.made().get().map(now -> now.copied().layers()).orElse(1);
+        int last = model.making().made().get().map(now -> now.copied().layers()).orElse(1);
         int first = use.role().isSurface() ? 1 : 0;
         List<Integer> layers = IntStream.rangeClosed(first, Math.max(last, use.layer()) + 1)
                 .boxed()

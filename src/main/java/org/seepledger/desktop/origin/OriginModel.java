@@ -1,6 +1,5 @@
 package org.seepledger.desktop.origin;
 
-import java.nio.file.Path;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
@@ -41,16 +40,13 @@ public final class OriginModel {
     /** More values than these are not kept: nobody reads them, and the sum of the others is told. */
     private static final int MOST = 5000;
 
-    private static final FileDialogs.Kind CSV = new FileDialogs.Kind("CSV", "*.csv");
-
     private final Session session;
     private final Reading reading;
     private final MassReading masses;
     private final SoluteLook look;
-    private final FileDialogs dialogs;
     private final CopyBoard copies;
     private final Lane tracing;
-    private final Lane writing;
+    private final TraceExport export;
     private final ObservableList<Line> lines = FXCollections.observableArrayList();
     private final StringProperty sought = new SimpleStringProperty("");
     private final ReadOnlyStringWrapper belongs = new ReadOnlyStringWrapper("");
@@ -86,10 +82,9 @@ public final class OriginModel {
         this.reading = reading;
         this.masses = masses;
         this.look = look;
-        this.dialogs = dialogs;
         this.copies = copies;
         this.tracing = tasks.latest("task.trace");
-        this.writing = tasks.latest("task.trace.writing");
+        this.export = new TraceExport(session, dialogs, tasks);
         session.asked().addListener((asked, before, after) -> after.ifPresent(this::ask));
         session.set().addListener((set, before, after) -> clear(nothing()));
         session.solute().addListener((solute, before, after) -> clear(nothing()));
@@ -254,22 +249,7 @@ public final class OriginModel {
         if (answer.isEmpty() || !remark.get().isEmpty()) {
             return;
         }
-        Question asked = question.orElseThrow();
-        Path suggested = asked.set().path().resolve("trace.csv");
-        dialogs.fileToWrite(Words.of("origin.export.title"), CSV, suggested).ifPresent(file -> write(asked, file));
-    }
-
-    private void write(Question asked, Path file) {
-        var drawing = session.shapes().get().drawing();
-        writing.run(
-                progress -> {
-                    EntryGuard.enter();
-                    asked.set().workbench().drawings().mustHold(asked.prisms(), drawing);
-                    asked.write(file, progress);
-                    return file;
-                },
-                written -> session.notices().done(Words.of("origin.written", written)),
-                fault -> session.notices().refuse(FaultWords.of(fault)));
+        export.ask(question.orElseThrow());
     }
 
     /** {@return the values, the largest contribution first} */

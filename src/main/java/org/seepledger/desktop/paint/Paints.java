@@ -5,7 +5,7 @@ import org.seepledger.desktop.theme.Theme;
 import org.seepledger.picture.Ink;
 
 /** The colours of inks in a theme. */
-public final class Paints {
+final class Paints {
 
     private Paints() {}
 
@@ -16,7 +16,7 @@ public final class Paints {
      * @param opacity from 0 to 1
      * @param theme the theme
      */
-    public static Color of(Ink ink, double opacity, Theme theme) {
+    static Color of(Ink ink, double opacity, Theme theme) {
         int rgb = theme.palette().colour(ink).value();
         return Color.rgb(rgb >> 16 & 0xff, rgb >> 8 & 0xff, rgb & 0xff, opacity);
     }

@@ -15,7 +15,7 @@ package org.seepledger.desktop.transect;
  * @param share its part of the whole discharge, in percent
  * @param areaShare its part of the whole area, in percent
  */
-public record TransectRow(
+record TransectRow(
         String name,
         String layer,
         boolean total,

@@ -18,6 +18,7 @@ import org.seepledger.picture.CrossingProfile;
 import org.seepledger.picture.Drape;
 import org.seepledger.picture.MapPicture;
 import org.seepledger.picture.MapPicture.Ground;
+import org.seepledger.picture.MapRoom;
 import org.seepledger.picture.MassCurve;
 import org.seepledger.picture.Picture;
 import org.seepledger.picture.PlumeTrack;
@@ -72,7 +73,7 @@ public final class PlumeDrawing {
                 .orElseThrow();
         SectionLine line = SectionLine.through(prism, aquifer.grid());
         Concentrations cells =
-                new Concentrations(result, MapPicture.frame(prism, WIDTH).window(aquifer.grid()));
+                new Concentrations(result, MapRoom.of(prism, WIDTH).window(aquifer.grid()));
         Optional<Picture> section = SectionPicture.of(
                 aquifer,
                 prism,

@@ -20,6 +20,7 @@ import org.seepledger.picture.Drape;
 import org.seepledger.picture.ExchangeDiagram;
 import org.seepledger.picture.MapPicture;
 import org.seepledger.picture.MapPicture.Ground;
+import org.seepledger.picture.MapRoom;
 import org.seepledger.picture.Picture;
 import org.seepledger.picture.SectionLine;
 import org.seepledger.picture.SectionPicture;
@@ -124,7 +125,7 @@ public final class ReportPictures {
         Optional<GriddedValues> head = aquifer.head();
         int step = head.isPresent() && head.get().changes() ? aquifer.times().intervals() : 0;
         Grid grid = aquifer.grid();
-        Window window = MapPicture.frame(prism, WIDTH).window(grid);
+        Window window = MapRoom.of(prism, WIDTH).window(grid);
         Drape drape = Drape.of(head.orElseGet(() -> aquifer.surface(layer)), layer, step, grid, window, MOST_CELLS);
         String what = head.isEmpty() ? "top" : step > 0 ? "head at the end of the record" : "head";
         return new Ground(drape, ValueScale.over(drape.values()), what, length, name(layer), true);

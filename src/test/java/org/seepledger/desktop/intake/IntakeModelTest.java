@@ -60,7 +60,7 @@ class IntakeModelTest {
         assertThat(model.rows())
                 .extracting(ItemRow::title)
                 .containsExactly("The set as a whole", "K.tif", "bottom.tif", "head.tif", "top.tif");
-        assertThat(model.check().get().says()).isPresent();
+        assertThat(model.making().check().get().says()).isPresent();
         assertThat(model.writing().target().get())
                 .isEqualTo(folder.resolve("loose-aquifer").toString());
         model.write();
@@ -142,7 +142,7 @@ class IntakeModelTest {
         }
         assertThat(tasks.waiting()).isEqualTo(1);
         tasks.all();
-        assertThat(model.check().get().says().orElseThrow().text()).contains("\"ABC\"");
+        assertThat(model.making().check().get().says().orElseThrow().text()).contains("\"ABC\"");
     }
 
     @Test
