@@ -32,6 +32,7 @@ public record ComparisonText(
 
     private static final double ROUNDING = 1e-9;
     private static final int TOLD = 6;
+    private static final String EVERY_LAYER = "*";
 
     /** {@return the inputs that are not the same, by name: changed, only first or only second} */
     public Map<String, String> changedInputs() {
@@ -126,7 +127,10 @@ public record ComparisonText(
         String unit = Difference.unit(one.first(), false);
         String other = Difference.unit(one.second(), false);
         String words = "  " + one.any().prism() + ", " + one.any().period() + ", "
-                + one.any().item() + " (layer " + one.any().layer() + "): "
+                + one.any().item()
+                + (one.any().layer().equals(EVERY_LAYER)
+                        ? ": "
+                        : " (layer " + one.any().layer() + "): ")
                 + Figures.shown(Difference.value(one.first(), false)) + " " + unit + " → "
                 + Figures.shown(Difference.value(one.second(), false)) + " " + other;
         return words + one.rate().map(split -> "; " + parts(split)).orElse("") + ".";

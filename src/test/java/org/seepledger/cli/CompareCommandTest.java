@@ -146,7 +146,9 @@ class CompareCommandTest {
         assertThat(Files.readString(folder.resolve("difference/inputs.csv")))
                 .contains("aquifer.json,")
                 .contains("changed");
-        assertThat(Files.readString(folder.resolve("difference/compare.html"))).contains("Two runs compared");
+        assertThat(Files.readString(folder.resolve("difference/compare.html")))
+                .contains("Two runs compared", "First, m³/d", "Second, m³/d")
+                .doesNotContain("(layer *)");
     }
 
     @Test

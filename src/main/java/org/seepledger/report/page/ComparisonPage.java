@@ -29,10 +29,14 @@ import java.time.LocalDate;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.Function;
 import org.seepledger.ledger.Disclaimer;
 import org.seepledger.report.ComparisonText;
+import org.seepledger.report.Wording;
 import org.seepledger.review.change.Difference;
+import org.seepledger.review.change.RecordedRow;
 import org.seepledger.review.change.Split;
+import org.seepledger.unit.Measure;
 
 /** Writes a comparison of two runs as one HTML page. */
 public final class ComparisonPage {
@@ -115,8 +119,8 @@ public final class ComparisonPage {
                                                 Cells.column("Period"),
                                                 Cells.column("Item"),
                                                 Cells.column("Layer"),
-                                                Cells.numberColumn("First"),
-                                                Cells.numberColumn("Second"),
+                                                Cells.numberColumn("First" + unit(shown, Difference::first)),
+                                                Cells.numberColumn("Second" + unit(shown, Difference::second)),
                                                 Cells.numberColumn("Difference"),
                                                 Cells.numberColumn("Percent"),
                                                 Cells.numberColumn("By area"),
@@ -124,7 +128,17 @@ public final class ComparisonPage {
                                                 Cells.numberColumn("By inputs"),
                                                 Cells.numberColumn("By unit"))),
                                         tbody(each(shown, ComparisonPage::row)))
-                                .withClass("budget")));
+                                .withClass("budget parts")));
+    }
+
+    /** A run has one unit for all its rates. */
+    private static String unit(List<Difference> differences, Function<Difference, Optional<RecordedRow>> run) {
+        return differences.stream()
+                .map(one -> Difference.unit(run.apply(one), false))
+                .filter(unit -> !unit.isEmpty())
+                .findFirst()
+                .map(unit -> ", " + Wording.raised(Measure.of(unit)))
+                .orElse("");
     }
 
     private static DomContent row(Difference difference) {
