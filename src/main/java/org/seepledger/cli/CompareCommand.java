@@ -33,10 +33,10 @@ final class CompareCommand implements Callable<Integer> {
 
     private final Terminal terminal;
 
-    @Parameters(index = "0", paramLabel = "RUN", description = "The folder that the first run of balance wrote.")
+    @Parameters(index = "0", paramLabel = "FIRST", description = "The folder that the first run of balance wrote.")
     private Path first;
 
-    @Parameters(index = "1", paramLabel = "RUN", description = "The folder that the second run wrote.")
+    @Parameters(index = "1", paramLabel = "SECOND", description = "The folder that the second run wrote.")
     private Path second;
 
     @Option(

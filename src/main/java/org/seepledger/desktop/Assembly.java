@@ -117,6 +117,7 @@ final class Assembly {
         draft.version().addListener((version, before, after) -> mapView.repaint());
         draft.tool().addListener((tool, before, after) -> mapView.repaint());
         tray.whenLeft(mapView::focus);
+        tray.whenTaken(mapView::repaint);
         this.running = new RunningModel(outside.tasks()::running);
         this.folio = new Folio(session, outside.tasks(), outside.dialogs(), outside.copies(), shell.theme());
         KeptLook.of(folio.look(), outside.settings());

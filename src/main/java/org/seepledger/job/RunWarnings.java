@@ -138,7 +138,7 @@ final class RunWarnings {
         for (Map.Entry<String, Uncounted> source : notes.uncounted().entrySet()) {
             if (source.getValue().missing() > 0) {
                 remarks.add("\"" + source.getKey() + "\" has no value in up to "
-                        + source.getValue().missing() + " cells of the prisms' window, and adds nothing there.");
+                        + source.getValue().missing() + " of the cells looked at, and adds nothing there.");
             }
         }
         return remarks;

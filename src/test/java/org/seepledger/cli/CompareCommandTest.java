@@ -164,5 +164,6 @@ class CompareCommandTest {
                 "--out",
                 folder.resolve("difference").toString());
         assertThat(none.status()).isEqualTo(3);
+        assertThat(none.err()).contains(folder + ": found no run.json; expected the output folder of an earlier run.");
     }
 }

@@ -2,6 +2,8 @@ package org.seepledger.cli;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.io.IOException;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -46,6 +48,14 @@ class InspectTest {
                 .containsPattern("recharge +m/d +0 +0\\.001000 +\\d+ +\\d+")
                 .containsPattern("flow x +m/d +0\\.1000 +0\\.1000");
         assertThat(text).contains("How the set balances in itself");
+    }
+
+    @Test
+    void aFileOfTheFolderLeadsToTheFolder() throws IOException {
+        Path file = Files.writeString(folder.resolve("aquifer.json"), "{}");
+        Ran ran = Ran.of("inspect", file.toString());
+        assertThat(ran.status()).isEqualTo(3);
+        assertThat(ran.err()).contains("found a file", "Did you mean \"" + folder + "\"?");
     }
 
     @Test

@@ -217,6 +217,34 @@ class ReviewCommandTest {
         assertThat(tolerance.status()).isEqualTo(2);
     }
 
+    /** Three terms stand for one period that the table does not name. */
+    @Test
+    void aPeriodWithoutANameIsNotSpokenOf() throws IOException {
+        Path submitted = folder.resolve("litres.csv");
+        Files.writeString(submitted, """
+                Water budget of the well field
+                Term,Inflow [L/s],Outflow [L/s]
+                Lateral flow,1866,171.7
+                Recharge,133.2,
+                Public supply,,1680
+                Irrigation,,140
+                """);
+        Ran ran = review(TERRACE, submitted);
+        assertThat(ran.out()).contains("fault units").doesNotContain("The numbers are those of");
+    }
+
+    @Test
+    void aTableThatIsNoBudgetIsDoubted() {
+        Ran ran = Ran.of(
+                "review",
+                "--submitted",
+                TERRACE.resolve("head.csv").toString(),
+                "--out",
+                folder.resolve("o").toString());
+        assertThat(ran.status()).isZero();
+        assertThat(ran.out()).contains("1 doubt for the author", "doubt not-tied");
+    }
+
     @Test
     void wholeCellsAreHeldAgainstWholeCells() throws IOException {
         Ran ran = review(TERRACE, TERRACE.resolve("submitted.csv"), "--whole-cells");

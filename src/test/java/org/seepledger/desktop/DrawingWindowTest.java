@@ -7,10 +7,16 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Optional;
+import javafx.event.Event;
+import javafx.event.EventType;
 import javafx.geometry.Point2D;
+import javafx.scene.Node;
 import javafx.scene.control.Label;
+import javafx.scene.control.TextField;
 import javafx.scene.input.KeyCode;
+import javafx.scene.input.KeyEvent;
 import javafx.scene.input.MouseButton;
+import javafx.scene.paint.Color;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -66,6 +72,38 @@ class DrawingWindowTest {
         window.robot.clickOn(at(502310, 5200280));
         window.robot.clickOn(at(502290, 5200700));
         window.robot.doubleClickOn(at(501880, 5200660));
+    }
+
+    private void key(EventType<KeyEvent> event, String letter, KeyCode code) {
+        KeyEvent key = new KeyEvent(event, letter, letter, code, false, false, false, false);
+        window.robot.interact(() -> Event.fireEvent(window.stage().getScene().getFocusOwner(), key));
+    }
+
+    /** A keyboard sends the letter after the press, to whatever has the keyboard by then. */
+    @Test
+    void theKeyThatLeadsToTheFieldLeavesNoLetterThereAndWhatIsTypedIsSeenAtOnce() {
+        window.robot.clickOn("#tool-polygon");
+        key(KeyEvent.KEY_PRESSED, KeyEvent.CHAR_UNDEFINED, KeyCode.T);
+        key(KeyEvent.KEY_TYPED, "t", KeyCode.UNDEFINED);
+        key(KeyEvent.KEY_RELEASED, KeyEvent.CHAR_UNDEFINED, KeyCode.T);
+        TextField typed = window.robot.lookup("#typed").queryAs(TextField.class);
+        assertThat(typed.isFocused()).isTrue();
+        assertThat(typed.getText()).isEmpty();
+        Color before = colour(501850, 5200250);
+        window.robot.write("501850, 5200250", 0);
+        assertThat(typed.getText()).isEqualTo("501850, 5200250");
+        type(KeyCode.ENTER);
+        window.settle();
+        assertThat(colour(501850, 5200250)).as("a vertex stands there").isNotEqualTo(before);
+    }
+
+    private Color colour(double mapX, double mapY) {
+        Node canvas = window.robot.lookup("#map-canvas").query();
+        Point2D at = canvas.screenToLocal(at(mapX, mapY));
+        Color[] seen = new Color[1];
+        window.robot.interact(() ->
+                seen[0] = canvas.snapshot(null, null).getPixelReader().getColor((int) at.getX(), (int) at.getY()));
+        return seen[0];
     }
 
     @Test

@@ -167,7 +167,7 @@ class KeyboardWalkTest {
     private void save() {
         type(KeyCode.CONTROL, KeyCode.S);
         window.await(
-                () -> window.assembly().session().notices().all().get(0).words().startsWith("Saved 5 prisms"));
+                () -> window.assembly().session().notices().all().get(0).words().matches("Saved in .*; prisms: 5\\."));
         assertThat(folder.resolve(Opening.PRISMS)).content().contains("meadow");
         assertThat(folder.resolve(Opening.UNSAVED)).doesNotExist();
     }

@@ -51,7 +51,7 @@ class ReviewWindowTest {
     private void reviewSample() {
         window.openSet(TERRACE);
         window.settle();
-        window.robot.clickOn("#open-review");
+        window.robot.clickOn("#shelf-review");
         window.answers.paths.add(Optional.of(SUBMITTED));
         window.robot.clickOn("#review-choose");
         window.await(() -> !findings().isEmpty());
@@ -217,6 +217,23 @@ class ReviewWindowTest {
         window.settle();
         window.type(KeyCode.CONTROL, KeyCode.G);
         window.await(() -> findings().stream().anyMatch(finding -> finding.code() == Code.WELL));
+    }
+
+    @Test
+    void aTableThatIsDroppedIsReviewedAndTheNextFindingIsReachedByKey() {
+        window.openSet(TERRACE);
+        window.settle();
+        window.type(KeyCode.CONTROL, KeyCode.G);
+        window.robot.interact(
+                () -> DraggedFolder.dropOn(window.robot.lookup("#review").query(), SUBMITTED));
+        window.await(() -> !findings().isEmpty());
+        window.robot.clickOn("#review-findings .table-row-cell");
+        window.await(() -> window.assembly().review().chosen().get().isPresent());
+        assertThat(window.assembly().session().selected().get()).isEqualTo("upper terrace");
+        window.robot.type(KeyCode.DOWN).type(KeyCode.DOWN);
+        assertThat(window.assembly().review().chosen().get().orElseThrow().code())
+                .isEqualTo(Code.WELL);
+        assertThat(window.assembly().session().selected().get()).isEqualTo("well field");
     }
 
     @Test

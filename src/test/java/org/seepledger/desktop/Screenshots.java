@@ -89,7 +89,7 @@ public final class Screenshots {
         Path terrace = Path.of("sample-aquifers/terrace");
         window.openSet(terrace);
         window.settle();
-        window.robot.clickOn("#open-review");
+        window.robot.clickOn("#shelf-review");
         window.robot.interact(() -> window.assembly().review().bring(terrace.resolve("submitted.csv")));
         window.await(() -> isFilled(window, "#review-findings"));
         window.robot.interact(() -> window.robot

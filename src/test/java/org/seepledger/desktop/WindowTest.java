@@ -43,7 +43,7 @@ class WindowTest {
         assertThat(window.robot.lookup("#set-name").queryAs(Button.class).getText())
                 .isEqualTo("Invented valley");
         assertThat(window.robot.lookup("#status").queryAs(Label.class).getText())
-                .isEqualTo("Opened Invented valley: 48 rows × 60 columns × 3 layers, 24 intervals.");
+                .isEqualTo("Opened Invented valley. Rows: 48, columns: 60, layers: 3, intervals: 24.");
     }
 
     @Test

@@ -20,6 +20,7 @@ public final class Tray extends HBox {
     private final PrismCard card;
     private final FieldFault typedFault = new FieldFault("typed-fault");
     private Runnable leave = () -> {};
+    private Runnable taken = () -> {};
     private final TextField typed = new TextField();
 
     /**
@@ -77,6 +78,7 @@ public final class Tray extends HBox {
             leave.run();
         } else if (hand.type(typed.getText())) {
             typed.clear();
+            taken.run();
         } else {
             typedFault.say(model.refusal().get());
         }
@@ -130,6 +132,15 @@ public final class Tray extends HBox {
     public void whenLeft(Runnable back) {
         leave = back;
         card.addEventFilter(KeyEvent.KEY_PRESSED, this::leave);
+    }
+
+    /**
+     * Says what follows when a typed value was taken.
+     *
+     * @param then shows it on the map
+     */
+    public void whenTaken(Runnable then) {
+        taken = then;
     }
 
     /** Moves the keyboard to the field for typed values. */

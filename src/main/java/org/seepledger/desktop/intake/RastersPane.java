@@ -1,6 +1,7 @@
 package org.seepledger.desktop.intake;
 
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.TreeSet;
 import java.util.stream.IntStream;
@@ -24,6 +25,10 @@ final class RastersPane extends VBox {
     private static final double WIDTH = 250;
     private static final double HEIGHT = 210;
     private static final double BESIDE = 230;
+
+    /** 9 comes before 10. */
+    private static final Comparator<String> BY_NUMBER =
+            Comparator.comparingInt(String::length).thenComparing(Comparator.naturalOrder());
 
     private final IntakeModel model;
     private final Item.Rasters item;
@@ -122,7 +127,7 @@ final class RastersPane extends VBox {
         List<Means> choices = List.of(Means.LAYER, Means.TIME, Means.NOTHING);
         for (int field = 0; field < item.fields().size(); field++) {
             int index = field;
-            TreeSet<String> texts = new TreeSet<>();
+            TreeSet<String> texts = new TreeSet<>(BY_NUMBER);
             item.names().forEach(name -> texts.add(name.fields().get(index).text()));
             if (texts.size() > 1 || item.fields().get(field) != Means.NOTHING) {
                 form.line(

@@ -118,6 +118,7 @@ final class LedgerChoices extends VBox {
     /** Rates, or what went through in all: volumes of water, masses of a solute. */
     private ChoiceBox<Boolean> amounts(LedgerModel model) {
         ChoiceBox<Boolean> box = box("ledger-amounts", List.of(false, true), this::amounts, reading.volumes());
+        box.setMinWidth(96);
         model.solute().addListener((solute, before, after) -> {
             if (before.isEmpty() != after.isEmpty()) {
                 box.getItems().setAll(false, true);

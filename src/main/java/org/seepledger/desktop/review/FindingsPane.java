@@ -25,7 +25,7 @@ import org.seepledger.unit.Figures;
 /** What was found: the verdict, the findings by weight, and of the one that is chosen all that can be said. */
 final class FindingsPane extends BorderPane {
 
-    private static final double LEAST_SENTENCE = 120;
+    private static final double LEAST_ROOM = 124;
 
     private final ReviewModel model;
     private final TableView<Finding> table = new TableView<>();
@@ -107,7 +107,7 @@ final class FindingsPane extends BorderPane {
         severity.setCellFactory(made -> new SeverityCell());
         table.getColumns().add(severity);
         table.getColumns()
-                .add(column("review.code", 112, finding -> finding.code().toString()));
+                .add(column("review.code", 124, finding -> finding.code().toString()));
         table.getColumns().add(column("review.where", 160, FindingsPane::where));
         table.getColumns().add(number("review.submitted", 98, Finding::submitted));
         table.getColumns().add(number("review.recomputed", 112, Finding::recomputed));
@@ -144,7 +144,7 @@ final class FindingsPane extends BorderPane {
         column.setSortable(false);
         column.setReorderable(false);
         column.setPrefWidth(width);
-        column.setMinWidth(Math.min(width, LEAST_SENTENCE));
+        column.setMinWidth(Math.min(width, LEAST_ROOM));
         column.setCellValueFactory(row -> new SimpleObjectProperty<>(row.getValue()));
         column.setCellFactory(made -> new TableCell<>() {
             @Override

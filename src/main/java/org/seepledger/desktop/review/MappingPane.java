@@ -194,6 +194,7 @@ final class MappingPane extends BorderPane {
             return new Label(row.unit());
         }
         TextField field = new TextField(row.unit());
+        field.setPromptText(Words.of("review.unit.prompt"));
         field.getStyleClass().add("small");
         Runnable take = () -> {
             if (!field.getText().equals(row.unit())) {

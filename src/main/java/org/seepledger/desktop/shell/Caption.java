@@ -17,6 +17,9 @@ final class Caption extends HBox {
     /** Where room is short, a long name gives way first. */
     private static final double LEAST_NAME = 96;
 
+    /** Where there is less, the review is turned to by its mark below the map alone. */
+    private static final double ROOM_FOR_ALL = 1400;
+
     Caption(ShellModel model, Node showing, Runnable actions, Runnable review, Runnable handOver) {
         getStyleClass().add("sl-caption");
         Button name = button("", model::turnPage, "caption.name.tip");
@@ -35,6 +38,8 @@ final class Caption extends HBox {
         over.setId("hand-over");
         Button submitted = button(Words.of("caption.review"), review, "action.review");
         submitted.setId("open-review");
+        submitted.visibleProperty().bind(widthProperty().greaterThanOrEqualTo(ROOM_FOR_ALL));
+        submitted.managedProperty().bind(submitted.visibleProperty());
         getChildren()
                 .addAll(
                         mark,

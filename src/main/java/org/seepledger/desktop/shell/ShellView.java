@@ -71,6 +71,7 @@ public final class ShellView extends StackPane {
     private final StackPane veil = new StackPane();
     private final StackPane around = new StackPane();
     private Optional<Node> before = Optional.empty();
+    private boolean acted;
     private final ActionsPage actionsPage;
     private final PreferencesPage preferencesPage;
     private final NoticePage noticePage;
@@ -143,6 +144,7 @@ public final class ShellView extends StackPane {
         work.visibleProperty().addListener((visible, before, after) -> requestLayout());
         work.setMinSize(LEAST_WIDTH, LEAST_HEIGHT);
         addEventFilter(KeyEvent.KEY_PRESSED, this::onKey);
+        addEventFilter(KeyEvent.KEY_TYPED, this::onTyped);
         for (Node part : List.of(this, veil)) {
             part.addEventFilter(KeyEvent.KEY_PRESSED, ShellView::press);
         }
@@ -305,15 +307,24 @@ public final class ShellView extends StackPane {
 
     /** Text fields keep all keys but commands; other controls those that they work with themselves. */
     private void onKey(KeyEvent key) {
+        acted = false;
         if (veil.isVisible() || isKept(key)) {
             return;
         }
         for (Action action : actions.all()) {
             if (KeyCombination.valueOf(action.keys()).match(key)) {
+                acted = true;
                 action.perform();
                 key.consume();
                 return;
             }
+        }
+    }
+
+    /** The letter of a key that did something is not typed into the field that has the keyboard since. */
+    private void onTyped(KeyEvent letter) {
+        if (acted) {
+            letter.consume();
         }
     }
 

@@ -7,6 +7,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import java.util.Optional;
 import org.seepledger.aquifer.Aquifer;
 import org.seepledger.aquifer.DarcyFlux;
@@ -108,10 +109,7 @@ public final class AquiferReader {
         Optional<String> near = exists
                 ? Optional.empty()
                 : file
-                        ? Optional.of(folder.toAbsolutePath()
-                                .getParent()
-                                .getFileName()
-                                .toString())
+                        ? Optional.of(String.valueOf(Objects.requireNonNullElse(folder.getParent(), Path.of("."))))
                         : NearestName.besides(folder);
         return new DataFault(
                 folder.toString(),

@@ -55,7 +55,7 @@ record ShapesReader(
         JsonNode features = root.path("features");
         if (!type.equals("FeatureCollection") || !features.isArray()) {
             throw spot.fault(
-                    root.isObject() ? "a GeoJSON object of type " + Spot.shown(root.path("type")) : Spot.shown(root),
+                    root.has("type") ? "a GeoJSON object of type " + Spot.shown(root.path("type")) : Spot.shown(root),
                     "a FeatureCollection of Polygons or MultiPolygons",
                     "Wrap the polygons in features, each with a property \"name\".");
         }

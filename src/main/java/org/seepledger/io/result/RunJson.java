@@ -98,6 +98,15 @@ public final class RunJson {
     }
 
     private static JsonNode read(Path file) {
+        if (!Files.exists(file) && file.getParent() != null) {
+            Path folder = file.getParent();
+            throw new DataFault(
+                    folder.toString(),
+                    "",
+                    Files.isDirectory(folder) ? "no " + file.getFileName() : "no such folder",
+                    "the output folder of an earlier run",
+                    "Name the folder that its --out named.");
+        }
         JsonNode root = JsonFile.read(file, file.toString());
         if (!root.path("program").asText().equals(PROGRAM)) {
             throw new DataFault(

@@ -130,7 +130,8 @@ public final class Review {
                 .filter(term -> terms.get(term) == Kind.OUTSIDE)
                 .toList();
         if (!unknown.isEmpty()) {
-            note(
+            tell(
+                    unknown.size() == terms.size() ? Severity.DOUBT : Severity.NOTE,
                     Code.NOT_TIED,
                     "Terms that are tied to none of ours: " + listed(unknown)
                             + ". Correct mapping.json and review again.");
@@ -188,7 +189,11 @@ public final class Review {
     }
 
     private void note(Code code, String message) {
-        findings.add(Finding.of(Severity.NOTE, code, Finding.SEVERAL, Finding.SEVERAL, Finding.SEVERAL, message));
+        tell(Severity.NOTE, code, message);
+    }
+
+    private void tell(Severity severity, Code code, String message) {
+        findings.add(Finding.of(severity, code, Finding.SEVERAL, Finding.SEVERAL, Finding.SEVERAL, message));
     }
 
     private static String listed(List<String> names) {

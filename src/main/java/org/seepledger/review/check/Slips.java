@@ -229,7 +229,7 @@ final class Slips {
                 worst.submitted() / worst.unit(),
                 worst.recomputed() / worst.unit(),
                 worst.figures().get(0).unit(),
-                series.points().size() == 1
+                series.points().size() == 1 || worst.when().label().isEmpty()
                         ? message
                         : message + " The numbers are those of " + worst.when().label() + ".");
     }

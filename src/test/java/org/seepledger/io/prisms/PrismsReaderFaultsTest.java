@@ -57,6 +57,7 @@ class PrismsReaderFaultsTest {
             value = {
                 "[]; p.geojson: found []; FeatureCollection",
                 "3; p.geojson: found 3; FeatureCollection",
+                "{\"name\": 7}; p.geojson: found {\"name\":7}; FeatureCollection",
                 "{\"type\": \"Polygon\", \"coordinates\": []}; GeoJSON object of type \"Polygon\"; property \"name\"",
                 "{\"type\": \"FeatureCollection\"}; type \"FeatureCollection\"; FeatureCollection",
                 "{\"type\": \"FeatureCollection\", \"features\": []}; found no features; Draw a prism.",
