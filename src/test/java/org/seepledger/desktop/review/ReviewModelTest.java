@@ -163,6 +163,19 @@ class ReviewModelTest {
     }
 
     @Test
+    void theTableIsHeldAgainstThePrismsAsTheyAreDrawnNow() throws IOException {
+        model.bring(table("area,term,m³/d record", "well field,Recharge,1"));
+        assertThat(row("area", "well field").is()).isEqualTo("well field");
+        Drawing drawn = session.drawing().get();
+        session.drawing().set(new Drawing(2, drawn.prisms().subList(1, 3), false));
+        assertThat(row("area", "well field").is()).isEqualTo("well field");
+        session.drawing().set(new Drawing(3, drawn.prisms().subList(1, 3), true));
+        assertThat(row("area", "well field").is()).isEqualTo("not tied");
+        session.drawing().set(new Drawing(4, List.of(), true));
+        assertThat(model.answer().get().orElseThrow().recomputed()).isFalse();
+    }
+
+    @Test
     void nothingIsWorkedOutWhileNobodyLooks() throws IOException {
         model.show(false);
         model.bring(table("area,term,m³/d record", "well field,Recharge,1"));
