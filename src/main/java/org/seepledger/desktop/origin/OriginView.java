@@ -12,6 +12,7 @@ import javafx.collections.transformation.SortedList;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
+import javafx.scene.control.OverrunStyle;
 import javafx.scene.control.SelectionMode;
 import javafx.scene.control.TableCell;
 import javafx.scene.control.TableColumn;
@@ -133,6 +134,8 @@ public final class OriginView extends BorderPane {
         private final VBox both = new VBox(file, place);
 
         PlaceCell() {
+            // Neighbouring values differ in what comes last.
+            place.setTextOverrun(OverrunStyle.LEADING_ELLIPSIS);
             place.getStyleClass().add("sl-small");
         }
 

@@ -2,6 +2,7 @@ package org.seepledger.desktop.pane;
 
 import javafx.animation.PauseTransition;
 import javafx.beans.value.ObservableValue;
+import javafx.geometry.Pos;
 import javafx.scene.Node;
 import javafx.scene.control.Button;
 import javafx.scene.control.Label;
@@ -40,6 +41,7 @@ public final class StatePane extends StackPane {
         words.getStyleClass().add("sl-notice-words");
         words.setWrapText(true);
         words.setMaxWidth(460);
+        words.setAlignment(Pos.CENTER);
         turning.setMaxSize(28, 28);
         getChildren().addAll(content, notice);
         patience.setOnFinished(waited -> showWorking());
