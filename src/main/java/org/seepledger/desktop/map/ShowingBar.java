@@ -10,6 +10,7 @@ import javafx.scene.control.Label;
 import javafx.scene.control.MenuButton;
 import javafx.scene.layout.HBox;
 import org.seepledger.aquifer.Times;
+import org.seepledger.desktop.pane.ShortOfRoom;
 import org.seepledger.desktop.session.OpenSet;
 import org.seepledger.desktop.session.Session;
 import org.seepledger.desktop.words.ChoiceWords;
@@ -21,8 +22,10 @@ import org.seepledger.unit.Figures;
 /** What is shown, as a sentence: this quantity, of this layer, in this interval. */
 public final class ShowingBar extends HBox {
 
-    private static final double LEAST_LAYER = 56;
+    /** Where room is short, the quantity gives way first, whose list has the whole of it. */
     private static final double LEAST_WIDTH = 96;
+
+    private static final double LEAST_LAYER = 72;
 
     private final MapModel model;
     private final ComboBox<MapQuantity> quantity = new ComboBox<>();
@@ -45,6 +48,7 @@ public final class ShowingBar extends HBox {
         model.values().quantity().addListener((shown, before, after) -> quantity.setValue(after.orElse(null)));
         quantity.setValue(model.values().quantity().get().orElse(null));
         layer.getStyleClass().add("sl-strong");
+        ShortOfRoom.keep(layer, LEAST_LAYER);
         interval.getStyleClass().addAll("sl-strong", "sl-interval");
         interval.setId("interval");
         Session session = model.session();
@@ -120,7 +124,6 @@ public final class ShowingBar extends HBox {
                         shownInterval,
                         model.session().numbers().get()))
                 .orElse(""));
-        layer.setMinWidth(LEAST_LAYER);
         interval.setMinWidth(USE_PREF_SIZE);
     }
 

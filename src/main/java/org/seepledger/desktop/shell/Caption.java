@@ -8,14 +8,15 @@ import javafx.scene.control.Tooltip;
 import javafx.scene.layout.HBox;
 import javafx.scene.layout.Priority;
 import javafx.scene.layout.Region;
+import org.seepledger.desktop.pane.ShortOfRoom;
 import org.seepledger.desktop.theme.Theme;
 import org.seepledger.desktop.words.Words;
 
 /** The line on top: which aquifer, and as a sentence what of it is shown. */
 final class Caption extends HBox {
 
-    /** Where room is short, a long name gives way first. */
-    private static final double LEAST_NAME = 96;
+    /** What is left of a long name where room is short. */
+    private static final double LEAST_NAME = 132;
 
     /** Where there is less, the review is turned to by its mark below the map alone. */
     private static final double ROOM_FOR_ALL = 1400;
@@ -29,7 +30,7 @@ final class Caption extends HBox {
                 .set()
                 .addListener((set, before, after) -> name.setText(model.name().orElse("")));
         name.setText(model.name().orElse(""));
-        name.setMinWidth(LEAST_NAME);
+        ShortOfRoom.keep(name, LEAST_NAME);
         Region gap = new Region();
         setHgrow(gap, Priority.ALWAYS);
         Label mark = new Label("≋");
