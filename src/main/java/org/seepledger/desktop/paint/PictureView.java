@@ -12,6 +12,9 @@ import org.seepledger.picture.Picture;
 public final class PictureView extends Region {
 
     private final ForSize pictures;
+    /** Whether pictures fill their room, and get lower with it, down to where they need more. */
+    private final boolean fills;
+
     private final ObservableValue<Theme> theme;
     private final SharpCanvas canvas = new SharpCanvas(this::redraw);
     private double drawnWidth = Double.NaN;
@@ -37,7 +40,7 @@ public final class PictureView extends Region {
      * @param theme gives its inks their colours
      */
     public PictureView(DoubleFunction<Optional<Picture>> pictures, ObservableValue<Theme> theme) {
-        this((width, height) -> pictures.apply(width), theme);
+        this((width, height) -> pictures.apply(width), false, theme);
     }
 
     /**
@@ -47,7 +50,12 @@ public final class PictureView extends Region {
      * @param theme gives its inks their colours
      */
     public PictureView(ForSize pictures, ObservableValue<Theme> theme) {
+        this(pictures, true, theme);
+    }
+
+    private PictureView(ForSize pictures, boolean fills, ObservableValue<Theme> theme) {
         this.pictures = pictures;
+        this.fills = fills;
         this.theme = theme;
         setAccessibleRole(AccessibleRole.IMAGE_VIEW);
         getChildren().add(canvas);
@@ -76,8 +84,12 @@ public final class PictureView extends Region {
         canvas.context().clearRect(0, 0, picture.width(), picture.height());
         new MarkPainter(canvas.context(), theme.getValue()).paint(picture.marks());
         setAccessibleText(picture.title() + ". " + picture.description());
-        setMinHeight(picture.height());
         setPrefHeight(picture.height());
+        if (!fills || picture.height() > drawnHeight) {
+            setMinHeight(picture.height());
+        } else if (drawnHeight > getMinHeight()) {
+            setMinHeight(0);
+        }
     }
 
     private void clear() {
