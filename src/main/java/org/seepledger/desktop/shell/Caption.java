@@ -16,7 +16,7 @@ import org.seepledger.desktop.words.Words;
 final class Caption extends HBox {
 
     /** What is left of a long name where room is short. */
-    private static final double LEAST_NAME = 132;
+    private static final double LEAST_NAME = 156;
 
     /** Where there is less, the review is turned to by its mark below the map alone. */
     private static final double ROOM_FOR_ALL = 1400;
