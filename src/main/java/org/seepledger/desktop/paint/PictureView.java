@@ -65,6 +65,9 @@ public final class PictureView extends Region {
     /** Draws it anew, since what it shows has changed. */
     public void redraw() {
         drawnWidth = Double.NaN;
+        if (fills) {
+            setMinHeight(0);
+        }
         requestLayout();
     }
 

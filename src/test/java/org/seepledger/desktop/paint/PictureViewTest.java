@@ -45,6 +45,17 @@ class PictureViewTest {
     }
 
     @Test
+    void anotherPictureMayNeedLess() {
+        double[] needed = {NEEDED};
+        PictureView.ForSize filling = (width, height) -> Optional.of(picture(width, Math.max(needed[0], height)));
+        PictureView view = new PictureView(filling, new SimpleObjectProperty<>(Theme.LIGHT));
+        assertThat(leastIn(view, 50)).isEqualTo(NEEDED);
+        needed[0] = 30;
+        new FxRobot().interact(view::redraw);
+        assertThat(leastIn(view, 50)).isLessThanOrEqualTo(0);
+    }
+
+    @Test
     void aPictureOfItsOwnHeightKeepsIt() {
         PictureView view =
                 new PictureView(width -> Optional.of(picture(width, 250)), new SimpleObjectProperty<>(Theme.LIGHT));
