@@ -7,7 +7,6 @@ import org.seepledger.job.CompareJob;
 import org.seepledger.job.CompareRequest;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
-import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 
 /** {@code seepledger compare}. */
@@ -39,15 +38,8 @@ final class CompareCommand implements Callable<Integer> {
     @Parameters(index = "1", paramLabel = "SECOND", description = "The folder that the second run wrote.")
     private Path second;
 
-    @Option(
-            names = "--out",
-            paramLabel = "DIR",
-            required = true,
-            description = "A new or empty folder for the results.")
-    private Path out;
-
-    @Option(names = "--overwrite", description = "Replace the files that an earlier comparison wrote to DIR.")
-    private boolean overwrite;
+    @Mixin
+    private OutputOptions output = new OutputOptions();
 
     @Mixin
     private WorkOptions work = new WorkOptions();
@@ -58,8 +50,8 @@ final class CompareCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        CompareRequest request =
-                new CompareRequest(first, second, out, work.threads(), overwrite, LocalDate.now(terminal.clock()));
+        CompareRequest request = new CompareRequest(
+                first, second, output.folder(), work.threads(), output.overwrite(), LocalDate.now(terminal.clock()));
         terminal.out().print(CompareJob.run(request, work.progress(terminal)));
         return 0;
     }

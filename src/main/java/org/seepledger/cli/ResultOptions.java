@@ -5,6 +5,7 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
 import org.seepledger.unit.Measure;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 
@@ -21,15 +22,8 @@ final class ResultOptions {
             description = "The prisms, as GeoJSON: polygons, each with a name.")
     private Path prisms;
 
-    @Option(
-            names = "--out",
-            paramLabel = "DIR",
-            required = true,
-            description = "A new or empty folder for the results.")
-    private Path out;
-
-    @Option(names = "--overwrite", description = "Replace the files that an earlier run wrote to DIR.")
-    private boolean overwrite;
+    @Mixin
+    private OutputOptions output = new OutputOptions();
 
     @Option(
             names = "--volume-unit",
@@ -46,11 +40,11 @@ final class ResultOptions {
     }
 
     Path out() {
-        return out;
+        return output.folder();
     }
 
     boolean overwrite() {
-        return overwrite;
+        return output.overwrite();
     }
 
     Optional<Measure> volumeUnit() {
@@ -61,6 +55,6 @@ final class ResultOptions {
     void tell(PrintStream to, String summary, List<String> files) {
         to.print(summary);
         to.println();
-        to.println("Written to " + out + ": " + String.join(", ", files));
+        to.println("Written to " + out() + ": " + String.join(", ", files));
     }
 }

@@ -61,15 +61,8 @@ final class ReviewCommand implements Callable<Integer> {
             description = "How to read it where the guess is wrong: a corrected mapping.json.")
     private Path mapping;
 
-    @Option(
-            names = "--out",
-            paramLabel = "DIR",
-            required = true,
-            description = "A new or empty folder for the results.")
-    private Path out;
-
-    @Option(names = "--overwrite", description = "Replace the files that an earlier review wrote to DIR.")
-    private boolean overwrite;
+    @Mixin
+    private OutputOptions output = new OutputOptions();
 
     @Option(
             names = "--tolerance",
@@ -104,7 +97,7 @@ final class ReviewCommand implements Callable<Integer> {
     public Integer call() {
         ReviewOutcome outcome = ReviewJob.run(request(), work.progress(terminal));
         terminal.out().print(outcome.summary());
-        terminal.out().println("Written to " + out + ": " + String.join(", ", outcome.files()));
+        terminal.out().println("Written to " + output.folder() + ": " + String.join(", ", outcome.files()));
         return outcome.fault() ? FAULT_FOUND : 0;
     }
 
@@ -120,13 +113,13 @@ final class ReviewCommand implements Callable<Integer> {
                 Optional.ofNullable(prisms),
                 submitted,
                 Optional.ofNullable(mapping),
-                out,
+                output.folder(),
                 tolerance,
                 wholeCells,
                 waterYearStart,
                 clip,
                 work.threads(),
-                overwrite,
+                output.overwrite(),
                 LocalDate.now(terminal.clock()));
     }
 }

@@ -243,41 +243,9 @@ public final class ShellView extends StackPane {
         Node owner = getScene().getFocusOwner();
         int here = -1;
         for (int pane = 0; pane < panes.size(); pane++) {
-            here = holds(panes.get(pane), owner) ? pane : here;
+            here = Focus.isIn(panes.get(pane), owner) ? pane : here;
         }
-        focusIn(panes.get((here + 1) % panes.size()));
-    }
-
-    private static void focusIn(Node pane) {
-        Node target = firstFocusable(pane);
-        (target == null ? pane : target).requestFocus();
-    }
-
-    private static Node firstFocusable(Node node) {
-        if (!node.isVisible()) {
-            return null;
-        }
-        if (node.isFocusTraversable() && !node.isDisabled()) {
-            return node;
-        }
-        if (node instanceof javafx.scene.Parent parent) {
-            for (Node child : parent.getChildrenUnmodifiable()) {
-                Node found = firstFocusable(child);
-                if (found != null) {
-                    return found;
-                }
-            }
-        }
-        return null;
-    }
-
-    private static boolean holds(Node pane, Node node) {
-        for (Node up = node; up != null; up = up.getParent()) {
-            if (up == pane) {
-                return true;
-            }
-        }
-        return false;
+        Focus.in(panes.get((here + 1) % panes.size()));
     }
 
     /**
@@ -300,9 +268,9 @@ public final class ShellView extends StackPane {
     public void lift() {
         veil.setVisible(false);
         around.getChildren().clear();
-        before.filter(node -> node.getScene() != null && holds(shown(), node))
+        before.filter(node -> node.getScene() != null && Focus.isIn(shown(), node))
                 .ifPresentOrElse(
-                        Node::requestFocus, () -> focusIn(model.atWelcome().get() ? slots.welcome() : slots.map()));
+                        Node::requestFocus, () -> Focus.in(model.atWelcome().get() ? slots.welcome() : slots.map()));
     }
 
     /** Text fields keep all keys but commands; other controls those that they work with themselves. */
@@ -341,9 +309,9 @@ public final class ShellView extends StackPane {
     private void stayIn(Node owner) {
         if (owner != null
                 && veil.isVisible()
-                && !holds(veil, owner)
+                && !Focus.isIn(veil, owner)
                 && !around.getChildren().isEmpty()) {
-            focusIn(around);
+            Focus.in(around);
         }
     }
 
